@@ -1,0 +1,150 @@
+import type {
+  Clarity,
+  NightState,
+  Phenomenon,
+  PhenomenonOutcome,
+  SkylineRule,
+  SkyNote,
+  StarOutcome,
+  StarOutcomeDetail,
+  ThresholdSetId,
+} from './vocabulary.js';
+
+/** One point of a skyline table. Azimuth 0…360° from north through east, altitude −5…60°. */
+export interface SkylinePoint {
+  azimuthDeg: number;
+  altitudeDeg: number;
+}
+
+/** Where people watch. East longitude positive. No skyline, or an empty one, means a flat horizon. */
+export interface Site {
+  latitudeDeg: number;
+  longitudeDeg: number;
+  elevationM: number;
+  /** IANA zone; null means local mean solar time. */
+  timeZone: string | null;
+  skyline: readonly SkylinePoint[];
+}
+
+/** How a place turns brightness into a needed depth of the Sun. */
+export interface VisibilitySettings {
+  thresholdSet: ThresholdSetId;
+  sameSideShiftDeg: number;
+  oppositeSideShiftDeg: number;
+  /** Twelve values, January first. */
+  clarityByMonth: readonly Clarity[];
+  skylineRule: SkylineRule;
+}
+
+/** A star of the table, as the eye sees it. */
+export interface Star {
+  hr: number;
+  hip: number | null;
+  name: string;
+  /** Greek letter, may be empty. */
+  bayer: string;
+  flamsteed: string;
+  constellation: string;
+  vMag: number;
+}
+
+/** A group of stars that is watched as one; dates are those of its indicator star. */
+export interface Figure {
+  key: string;
+  name: string;
+  indicatorHr: number;
+  memberHrs: readonly number[];
+  /** Depths to use instead of those of the indicator's magnitude; null keeps the rule of the place. */
+  thresholdOverride: { sameSideDeg: number; oppositeSideDeg: number } | null;
+}
+
+/** `hr<number>` for a star, the figure's key for a figure. */
+export type MarkerKey = string;
+
+export interface CalendarDate {
+  /** Astronomical year: 0 = 1 BC. */
+  year: number;
+  month: number;
+  day: number;
+}
+
+/** A civil day with both labels. */
+export interface CivilDay {
+  /** Julian Day Number of the civil day (the JD at its noon). */
+  dayNumber: number;
+  gregorian: CalendarDate;
+  julian: CalendarDate;
+}
+
+/** One crossing of the skyline that carries a date. */
+export interface Crossing extends CivilDay {
+  /** Julian Day (UT) of the crossing. */
+  jdUt: number;
+  /** Depth of the Sun's centre at the crossing, degrees below the mathematical horizon. */
+  sunDepressionDeg: number;
+  /** Depth that was asked for at this crossing. */
+  neededDepressionDeg: number;
+  starAzimuthDeg: number;
+  /** Altitude of the skyline where the star crosses it. */
+  starAltitudeDeg: number;
+  sunAzimuthDeg: number;
+}
+
+/** One occurrence of a phenomenon: the expected day and the two ends of its range, all of the same disappearance. */
+export interface Occurrence {
+  expected: Crossing;
+  /** Null where the sky never gets dark enough for that end. Sorted by date: early ≤ expected ≤ late. */
+  early: Crossing | null;
+  late: Crossing | null;
+  clarity: Clarity;
+  notes: readonly SkyNote[];
+}
+
+export interface PhenomenonResult {
+  phenomenon: Phenomenon;
+  outcome: PhenomenonOutcome;
+  /** Occurrences whose expected day falls in the civil year: 0, 1 or 2. */
+  occurrences: readonly Occurrence[];
+}
+
+/** What a result rests on. */
+export interface Basis {
+  thresholdSet: ThresholdSetId;
+  thresholdSource: string;
+  sameSideDeg: number;
+  oppositeSideDeg: number;
+  sameSideShiftDeg: number;
+  oppositeSideShiftDeg: number;
+  skylineRule: SkylineRule;
+  clarityByMonth: readonly Clarity[];
+  year: number;
+  engineVersion: string;
+}
+
+/** A star's or a figure's year at a place. */
+export interface MarkerYear {
+  markerKey: MarkerKey;
+  year: number;
+  outcome: StarOutcome;
+  outcomeDetail: StarOutcomeDetail | null;
+  phenomena: Readonly<Record<Phenomenon, PhenomenonResult>>;
+  /** Nights between the last evening and the first morning; null where the question has no answer. */
+  nightsHidden: number | null;
+  notes: readonly SkyNote[];
+  basis: Basis;
+}
+
+/** A run of nights in the same state; both days belong to it. Day numbers lie within the civil year. */
+export interface StripSegment {
+  state: NightState;
+  fromDayNumber: number;
+  toDayNumber: number;
+}
+
+/** When to stop in the morning and begin in the evening of a civil day (Julian Days UT; null where the Sun does not cross). */
+export interface WatchTimes {
+  stopLookingJdUt: number | null;
+  startLookingJdUt: number | null;
+  flatSunriseJdUt: number | null;
+  flatSunsetJdUt: number | null;
+}

@@ -1,0 +1,54 @@
+/** The closed lists of words that the core answers with. Sentences are made from them elsewhere. */
+
+export const PHENOMENA = [
+  'heliacal-rising',
+  'cosmical-setting',
+  'acronychal-rising',
+  'heliacal-setting',
+] as const;
+export type Phenomenon = (typeof PHENOMENA)[number];
+
+/** What a star does at a place, whatever the Sun does. */
+export const STAR_OUTCOMES = ['rises-and-sets', 'never-sets', 'never-clears-skyline'] as const;
+export type StarOutcome = (typeof STAR_OUTCOMES)[number];
+
+/** Why a star never clears the skyline. */
+export const STAR_OUTCOME_DETAILS = ['never-rises', 'below-skyline'] as const;
+export type StarOutcomeDetail = (typeof STAR_OUTCOME_DETAILS)[number];
+
+/** What one phenomenon does in one civil year. */
+export const PHENOMENON_OUTCOMES = ['dated', 'none-in-this-year', 'never-dark-enough'] as const;
+export type PhenomenonOutcome = (typeof PHENOMENON_OUTCOMES)[number];
+
+/** Remarks that stand beside dates. */
+export const SKY_NOTES = ['never-disappears', 'weak-marker', 'lost-in-light-nights', 'threshold-extrapolated'] as const;
+export type SkyNote = (typeof SKY_NOTES)[number];
+
+export const THRESHOLD_SETS = ['three-class', 'linear-magnitude', 'azimuth-difference'] as const;
+export type ThresholdSetId = (typeof THRESHOLD_SETS)[number];
+
+/** Which rule joins the threshold to the skyline; see SOURCES.md. */
+export const SKYLINE_RULES = ['depth-at-crossing', 'altitude-difference'] as const;
+export type SkylineRule = (typeof SKYLINE_RULES)[number];
+
+/** How clear the air usually is in a month. */
+export const CLARITIES = ['clear', 'ordinary', 'hazy'] as const;
+export type Clarity = (typeof CLARITIES)[number];
+
+/** What a star does on one night; the six states of a year's strip. */
+export const NIGHT_STATES = [
+  'hidden',
+  'before-dawn',
+  'all-night',
+  'rises-and-sets-in-night',
+  'after-dusk',
+  'dusk-and-dawn',
+] as const;
+export type NightState = (typeof NIGHT_STATES)[number];
+
+/** Years the engine offers, astronomical numbering (0 = 1 BC). */
+export const FIRST_YEAR = -3000;
+export const LAST_YEAR = 3000;
+
+/** Version of the method; it changes whenever a date could change. */
+export const ENGINE_VERSION = '1.0.0';
