@@ -21,7 +21,12 @@ export const PHENOMENON_OUTCOMES = ['dated', 'none-in-this-year', 'never-dark-en
 export type PhenomenonOutcome = (typeof PHENOMENON_OUTCOMES)[number];
 
 /** Remarks that stand beside dates. */
-export const SKY_NOTES = ['never-disappears', 'weak-marker', 'lost-in-light-nights', 'threshold-extrapolated'] as const;
+export const SKY_NOTES = [
+  'never-disappears',
+  'weak-marker',
+  'lost-in-light-nights',
+  'threshold-extrapolated',
+] as const;
 export type SkyNote = (typeof SKY_NOTES)[number];
 
 export const THRESHOLD_SETS = ['three-class', 'linear-magnitude', 'azimuth-difference'] as const;

@@ -1,0 +1,60 @@
+import { z } from 'zod';
+import { id, instant, listOf, pageQuery } from './common.js';
+import { defineEndpoint, member } from './endpoint.js';
+
+/** Everything that is written down when it happens. Rows hold ids and codes; sentences are made on reading. */
+export const AUDIT_ACTIONS = [
+  'person-added',
+  'roles-changed',
+  'code-renewed',
+  'membership-ended',
+  'password-set',
+  'community-founded',
+  'settings-changed',
+  'place-added',
+  'place-changed',
+  'calendar-begun',
+  'entry-added',
+  'entry-changed',
+  'entry-copied',
+  'entry-deleted',
+  'entry-restored',
+  'entries-reordered',
+  'submitted',
+  'changes-asked',
+  'answered',
+  'answered-on-behalf',
+  'answer-taken-back',
+  'difference-let-stand',
+  'signed',
+  'signed-off',
+  'published',
+  'replaced',
+  'recalled',
+] as const;
+export type AuditAction = (typeof AUDIT_ACTIONS)[number];
+
+export const auditEvent = z.strictObject({
+  id,
+  at: instant,
+  actorName: z.string(),
+  action: z.enum(AUDIT_ACTIONS),
+  /** Names looked up now from the ids that the row keeps; null where the thing is gone. */
+  subjectName: z.string().nullable(),
+  /** Codes and numbers only, e.g. `{ "number": 2, "fields": ["offsets"] }`. */
+  details: z.record(z.string(), z.unknown()),
+});
+export type AuditEvent = z.infer<typeof auditEvent>;
+
+export const auditEndpoints = {
+  list: defineEndpoint({
+    id: 'listAuditEvents',
+    method: 'GET',
+    path: '/api/communities/:communityId/audit',
+    summary: 'Who did what, newest first',
+    access: member('community', 'steward', 'officer', 'elder'),
+    params: z.strictObject({ communityId: id }),
+    query: pageQuery,
+    response: listOf(auditEvent),
+  }),
+} as const;

@@ -1,0 +1,27 @@
+import type { Endpoint } from './endpoint.js';
+import { auditEndpoints } from './audit.js';
+import { calendarsEndpoints } from './calendars.js';
+import { healthEndpoints } from './health.js';
+import { peopleEndpoints } from './people.js';
+import { placesEndpoints } from './places.js';
+import { reviewsEndpoints } from './reviews.js';
+import { sessionEndpoints } from './session.js';
+import { sheetsEndpoints } from './sheets.js';
+import { starsEndpoints } from './stars.js';
+import { todayEndpoints } from './today.js';
+import { versionsEndpoints } from './versions.js';
+
+/** Every operation of the API. The server mounts exactly these; OpenAPI and the permission table list them. */
+export const ENDPOINTS: readonly Endpoint[] = [
+  healthEndpoints,
+  sessionEndpoints,
+  peopleEndpoints,
+  placesEndpoints,
+  starsEndpoints,
+  calendarsEndpoints,
+  versionsEndpoints,
+  reviewsEndpoints,
+  sheetsEndpoints,
+  auditEndpoints,
+  todayEndpoints,
+].flatMap((group) => Object.values(group) as Endpoint[]);

@@ -1,0 +1,222 @@
+import { z } from 'zod';
+import { id, instant, line, listOf } from './common.js';
+import { entryDates, entryInput } from './calendars.js';
+import { defineEndpoint, member } from './endpoint.js';
+import { language, ROLES, signOffRule } from './people.js';
+import { markerNames, nightSegment, placeSnapshot } from './stars.js';
+
+export const VERSION_STATES = [
+  'in-review',
+  'changes-asked',
+  'signed-off',
+  'published',
+  'replaced',
+  'recalled',
+] as const;
+export const versionState = z.enum(VERSION_STATES);
+export type VersionState = (typeof VERSION_STATES)[number];
+
+/** A submission number, counted from 1 within the calendar, or the draft. */
+export const versionNumber = z.string().regex(/^(draft|[1-9]\d{0,5})$/u, 'version-number');
+export const submissionNumber = z.string().regex(/^[1-9]\d{0,5}$/u, 'version-number');
+
+/** A marker that some entry goes by, frozen with its names and its year. */
+export const frozenMarker = markerNames.extend({ strip: z.array(nightSegment) });
+export type FrozenMarker = z.infer<typeof frozenMarker>;
+
+/** Everything that a version's dates and print rest on, besides its entries. Hashed. */
+export const versionHeader = z.strictObject({
+  schema: z.literal(1),
+  calendarId: id,
+  number: z.number().int(),
+  year: z.number().int(),
+  engineVersion: z.string(),
+  submittedAt: instant,
+  communityName: z.string(),
+  villageLanguage: language,
+  officerLanguage: language,
+  weatherContact: z.string(),
+  agricultureContact: z.string(),
+  place: placeSnapshot,
+  markers: z.array(frozenMarker),
+});
+export type VersionHeader = z.infer<typeof versionHeader>;
+
+export const versionEntryBody = z.strictObject({ entryId: id, content: entryInput, dates: entryDates });
+export type VersionEntryBody = z.infer<typeof versionEntryBody>;
+
+export const versionEntry = versionEntryBody.extend({
+  position: z.number().int(),
+  /** Hex; with the canonical JSON it gives `hash`. */
+  salt: z.string(),
+  hash: z.string(),
+});
+export type VersionEntry = z.infer<typeof versionEntry>;
+
+export const signatureRole = z.enum(['elder', 'steward']);
+export const signature = z.strictObject({
+  personId: id,
+  displayName: z.string(),
+  role: signatureRole,
+  signedAt: instant,
+});
+export type Signature = z.infer<typeof signature>;
+
+export const SIGN_OFF_GAPS = [
+  'needs-elders',
+  'needs-person',
+  'needs-one-of',
+  'needs-steward',
+  'entry-without-agree',
+  'change-stands',
+  'not-for-board-stands',
+] as const;
+
+/** What still stands between a submission and "signed off". */
+export const signOffGap = z.strictObject({
+  code: z.enum(SIGN_OFF_GAPS),
+  /** People the gap is about, or entries, by name. */
+  names: z.array(z.string()),
+  count: z.number().int(),
+});
+export type SignOffGap = z.infer<typeof signOffGap>;
+
+export const versionSummary = z.strictObject({
+  id,
+  calendarId: id,
+  number: z.number().int(),
+  label: z.string().nullable(),
+  state: versionState,
+  submittedBy: z.string(),
+  submittedAt: instant,
+  publishedAt: instant.nullable(),
+  entryCount: z.number().int(),
+  hash: z.string(),
+});
+export type VersionSummary = z.infer<typeof versionSummary>;
+
+export const version = versionSummary.extend({
+  header: versionHeader,
+  headerHash: z.string(),
+  entries: z.array(versionEntry),
+  signatures: z.array(signature),
+  signOffRule,
+  gaps: z.array(signOffGap),
+  /** What the asking person may do now. */
+  may: z.strictObject({
+    answer: z.boolean(),
+    signAsElder: z.boolean(),
+    signAsSteward: z.boolean(),
+    /** Why signing is closed to an elder or a steward; null where it is open or not theirs. */
+    signClosedBy: z
+      .enum(['wrote-the-draft', 'answers-missing', 'already-signed', 'not-in-review'])
+      .nullable(),
+    askChanges: z.boolean(),
+    publish: z.boolean(),
+    recall: z.boolean(),
+  }),
+});
+export type Version = z.infer<typeof version>;
+
+/** One field of an entry or of the header that differs. Values are plain JSON for the sentence maker. */
+export const fieldChange = z.strictObject({ field: z.string(), before: z.unknown(), after: z.unknown() });
+export type FieldChange = z.infer<typeof fieldChange>;
+
+export const entryComparison = z.strictObject({
+  entryId: id,
+  change: z.enum(['added', 'removed', 'changed', 'same']),
+  titleOfficer: z.string(),
+  titleVillage: z.string(),
+  before: versionEntryBody.nullable(),
+  after: versionEntryBody.nullable(),
+  fields: z.array(fieldChange),
+});
+export type EntryComparison = z.infer<typeof entryComparison>;
+
+export const comparison = z.strictObject({
+  from: z.string(),
+  to: z.string(),
+  year: z.number().int(),
+  counts: z.strictObject({
+    added: z.number().int(),
+    removed: z.number().int(),
+    changed: z.number().int(),
+    same: z.number().int(),
+  }),
+  header: z.array(fieldChange),
+  entries: z.array(entryComparison),
+});
+export type Comparison = z.infer<typeof comparison>;
+
+const calendarParams = z.strictObject({ calendarId: id });
+const numberParams = z.strictObject({ calendarId: id, number: submissionNumber });
+
+export const versionsEndpoints = {
+  list: defineEndpoint({
+    id: 'listVersions',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions',
+    summary: 'Submissions and published versions, newest first; villagers and staff see what was published',
+    access: member('calendar', ...ROLES),
+    params: calendarParams,
+    response: listOf(versionSummary),
+  }),
+  submit: defineEndpoint({
+    id: 'submitDraft',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions',
+    summary: 'Freeze the draft and send it to review',
+    access: member('calendar', 'officer'),
+    params: calendarParams,
+    response: version,
+    status: 201,
+  }),
+  read: defineEndpoint({
+    id: 'readVersion',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number',
+    summary: 'A version as it was frozen, with its state and signatures',
+    access: member('calendar', ...ROLES),
+    params: numberParams,
+    response: version,
+  }),
+  compare: defineEndpoint({
+    id: 'compareVersions',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/comparison',
+    summary: 'Two versions entry by entry; either side may be the draft',
+    access: member('calendar', ...ROLES),
+    params: calendarParams,
+    query: z.strictObject({ from: versionNumber, to: versionNumber }),
+    response: comparison,
+  }),
+  askChanges: defineEndpoint({
+    id: 'askChanges',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/changes-asked',
+    summary: 'End a submission so that the draft opens again',
+    access: member('calendar', 'officer'),
+    params: numberParams,
+    body: z.strictObject({ reason: z.enum(['taken-back', 'elder-asked']), note: line(300) }),
+    response: version,
+  }),
+  publish: defineEndpoint({
+    id: 'publishVersion',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/publish',
+    summary: 'Publish a signed-off submission; the version before it becomes replaced',
+    access: member('calendar', 'officer'),
+    params: numberParams,
+    response: version,
+  }),
+  recall: defineEndpoint({
+    id: 'recallVersion',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/recall',
+    summary: 'Recall a published version',
+    access: member('calendar', 'officer'),
+    params: numberParams,
+    body: z.strictObject({ note: line(300, 1) }),
+    response: version,
+  }),
+} as const;
