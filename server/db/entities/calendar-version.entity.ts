@@ -1,0 +1,64 @@
+import type { VersionState } from '#shared/contracts/versions.js';
+import {
+  Column,
+  Entity,
+  JoinColumn,
+  ManyToOne,
+  OneToMany,
+  PrimaryColumn,
+  Unique,
+  type Relation,
+} from 'typeorm';
+import { CalendarEntity } from './calendar.entity.js';
+import { codeColumn, instantColumn, sha256Column } from './columns.js';
+import { VersionEntryEntity } from './version-entry.entity.js';
+
+/** A frozen submission. Header and entries never change; label, state and note stand outside the hash. */
+@Entity({ name: 'calendar_version' })
+@Unique('calendar_version_number', ['calendarId', 'number'])
+export class CalendarVersionEntity {
+  @PrimaryColumn({ type: 'uuid' })
+  id!: string;
+
+  @Column({ name: 'calendar_id', type: 'uuid' })
+  calendarId!: string;
+
+  @ManyToOne(() => CalendarEntity, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'calendar_id', foreignKeyConstraintName: 'fk_calendar_version_calendar' })
+  calendar!: Relation<CalendarEntity>;
+
+  @Column({ type: 'int' })
+  number!: number;
+
+  @Column({ type: 'varchar', length: 20, nullable: true })
+  label!: string | null;
+
+  @Column(codeColumn(16))
+  state!: VersionState;
+
+  /** Why changes were asked or the version was recalled. */
+  @Column({ name: 'state_note', type: 'varchar', length: 300, default: '' })
+  stateNote!: string;
+
+  /** Canonical JSON, exactly as hashed. */
+  @Column({ name: 'header_text', type: 'longtext' })
+  headerText!: string;
+
+  @Column({ name: 'header_hash', ...sha256Column })
+  headerHash!: string;
+
+  @Column({ ...sha256Column })
+  hash!: string;
+
+  @Column({ name: 'submitted_by', type: 'uuid' })
+  submittedBy!: string;
+
+  @Column({ name: 'submitted_at', ...instantColumn })
+  submittedAt!: Date;
+
+  @Column({ name: 'published_at', ...instantColumn, nullable: true })
+  publishedAt!: Date | null;
+
+  @OneToMany(() => VersionEntryEntity, (entry) => entry.calendarVersion)
+  entries!: Relation<VersionEntryEntity>[];
+}

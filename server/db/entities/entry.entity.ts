@@ -1,0 +1,47 @@
+import type { EntryInput } from '#shared/contracts/calendars.js';
+import {
+  Column,
+  Entity,
+  Index,
+  JoinColumn,
+  ManyToOne,
+  PrimaryColumn,
+  VersionColumn,
+  type Relation,
+} from 'typeorm';
+import { CalendarEntity } from './calendar.entity.js';
+import { instantColumn } from './columns.js';
+
+/** One line of a draft. */
+@Entity({ name: 'entry' })
+@Index('entry_calendar_position', ['calendarId', 'position'])
+export class EntryEntity {
+  @PrimaryColumn({ type: 'uuid' })
+  id!: string;
+
+  @Column({ name: 'calendar_id', type: 'uuid' })
+  calendarId!: string;
+
+  @ManyToOne(() => CalendarEntity, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'calendar_id', foreignKeyConstraintName: 'fk_entry_calendar' })
+  calendar!: Relation<CalendarEntity>;
+
+  @Column({ type: 'int' })
+  position!: number;
+
+  @Column({ type: 'json' })
+  content!: EntryInput;
+
+  /** Set when an officer took the entry out; it can be put back. */
+  @Column({ name: 'deleted_at', ...instantColumn, nullable: true })
+  deletedAt!: Date | null;
+
+  @Column({ name: 'updated_by', type: 'uuid' })
+  updatedBy!: string;
+
+  @Column({ name: 'updated_at', ...instantColumn })
+  updatedAt!: Date;
+
+  @VersionColumn({ type: 'int' })
+  version!: number;
+}

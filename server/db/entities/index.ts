@@ -1,0 +1,32 @@
+import { AnswerEntity } from './answer.entity.js';
+import { AuditEventEntity } from './audit-event.entity.js';
+import { CalendarVersionEntity } from './calendar-version.entity.js';
+import { CalendarEntity } from './calendar.entity.js';
+import { CommunityEntity } from './community.entity.js';
+import { DraftContributionEntity } from './draft-contribution.entity.js';
+import { EntryEntity } from './entry.entity.js';
+import { MembershipEntity } from './membership.entity.js';
+import { OneTimeCodeEntity } from './one-time-code.entity.js';
+import { PersonEntity } from './person.entity.js';
+import { PlaceEntity } from './place.entity.js';
+import { SessionEntity } from './session.entity.js';
+import { SignatureEntity } from './signature.entity.js';
+import { VersionEntryEntity } from './version-entry.entity.js';
+
+/** Named one by one: a glob would miss a file quietly, and breaks in a build. */
+export const ENTITIES = [
+  PersonEntity,
+  SessionEntity,
+  OneTimeCodeEntity,
+  CommunityEntity,
+  MembershipEntity,
+  PlaceEntity,
+  CalendarEntity,
+  EntryEntity,
+  DraftContributionEntity,
+  CalendarVersionEntity,
+  VersionEntryEntity,
+  AnswerEntity,
+  SignatureEntity,
+  AuditEventEntity,
+];

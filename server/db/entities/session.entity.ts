@@ -1,0 +1,20 @@
+import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
+import { codeColumn, instantColumn } from './columns.js';
+
+/** A browser's session. The id is kept as a hash: a stolen table opens no session. */
+@Entity({ name: 'session' })
+export class SessionEntity {
+  @PrimaryColumn({ name: 'sid_hash', ...codeColumn(64) })
+  sidHash!: string;
+
+  @Index('session_person')
+  @Column({ name: 'person_id', type: 'uuid', nullable: true })
+  personId!: string | null;
+
+  @Column({ type: 'longtext' })
+  data!: string;
+
+  @Index('session_expiry')
+  @Column({ name: 'expires_at', ...instantColumn })
+  expiresAt!: Date;
+}

@@ -1,0 +1,36 @@
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, Unique, type Relation } from 'typeorm';
+import { CalendarVersionEntity } from './calendar-version.entity.js';
+import { codeColumn, sha256Column } from './columns.js';
+
+/** An entry as it was frozen. */
+@Entity({ name: 'version_entry' })
+@Unique('version_entry_position', ['versionId', 'position'])
+export class VersionEntryEntity {
+  @PrimaryColumn({ type: 'uuid' })
+  id!: string;
+
+  @Column({ name: 'version_id', type: 'uuid' })
+  versionId!: string;
+
+  @ManyToOne(() => CalendarVersionEntity, (version) => version.entries, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'version_id', foreignKeyConstraintName: 'fk_version_entry_version' })
+  calendarVersion!: Relation<CalendarVersionEntity>;
+
+  @Column({ type: 'int' })
+  position!: number;
+
+  @Index('version_entry_entry')
+  @Column({ name: 'entry_id', type: 'uuid' })
+  entryId!: string;
+
+  /** Random, hex; unchanged content keeps its salt, and so its hash, in the next submission. */
+  @Column(codeColumn(64))
+  salt!: string;
+
+  /** Canonical JSON, exactly as hashed behind the salt. */
+  @Column({ name: 'body_text', type: 'longtext' })
+  bodyText!: string;
+
+  @Column({ ...sha256Column })
+  hash!: string;
+}
