@@ -20,10 +20,15 @@ export const texts = {
     'code-not-valid': 'This code has been used, has run out or is not right. Ask the steward for a new one.',
     'too-many-attempts': 'Too many tries in a short time. Wait a quarter of an hour, then try again.',
     'something-broke': 'Something went wrong on our side. Nothing was changed; try again in a moment.',
-    'database-unreachable': 'The records cannot be reached just now. Nothing was changed; try again in a moment.',
-    offline: 'There is no network just now. What you typed is kept on this device; try again when it is back.',
+    'database-unreachable':
+      'The records cannot be reached just now. Nothing was changed; try again in a moment.',
+    offline:
+      'There is no network just now. What you typed is kept on this device; try again when it is back.',
+    unreadable: 'The answer could not be read. What you typed is still here; try again in a moment.',
     unknown: 'The server could not do this. What you typed is still here; try again in a moment.',
   },
+  waitMinutes_one: 'Too many tries in a short time. Wait {{count}} minute, then try again.',
+  waitMinutes_other: 'Too many tries in a short time. Wait {{count}} minutes, then try again.',
   reason: {
     'email-known': 'Somebody of this village already has this e-mail address.',
     'last-steward': 'The village needs at least one steward. Make somebody else a steward first.',
@@ -83,7 +88,8 @@ export const texts = {
     'marker-key': 'This is no marker. Choose one from the list of stars.',
     'unknown-marker': 'This star or figure is not in the table. Choose one from the list.',
     'offset-range': 'Days count from −366 to 366.',
-    'window-order': 'This day lies before the one in front of it. Keep the order: earliest, best from, best to, last.',
+    'window-order':
+      'This day lies before the one in front of it. Keep the order: earliest, best from, best to, last.',
     'window-too-long': 'A window spans at most a year.',
     'last-date-required': 'Give the fixed last date and the office that set it.',
     'last-date-not-marked': 'Mark the entry as one with a last date, or take the date out.',

@@ -1,0 +1,2 @@
+/** English texts of the namespace "calendars". Keys with _one and _other follow i18next's plural rules. */
+export const texts = {} as const;

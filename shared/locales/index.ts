@@ -1,0 +1,43 @@
+import { texts as audit } from './en/audit.js';
+import { texts as calendars } from './en/calendars.js';
+import { texts as common } from './en/common.js';
+import { texts as people } from './en/people.js';
+import { texts as places } from './en/places.js';
+import { texts as problems } from './en/problems.js';
+import { texts as reviews } from './en/reviews.js';
+import { texts as session } from './en/session.js';
+import { texts as sheets } from './en/sheets.js';
+import { texts as sky } from './en/sky.js';
+import { texts as stars } from './en/stars.js';
+import { texts as today } from './en/today.js';
+
+/**
+ * English is complete and the measure for every other language: another language is a folder with the same
+ * files, and what it lacks falls back to English.
+ */
+export const en = {
+  common,
+  session,
+  people,
+  places,
+  stars,
+  calendars,
+  reviews,
+  sheets,
+  audit,
+  problems,
+  sky,
+  today,
+} as const;
+
+export type Namespace = keyof typeof en;
+
+export const NAMESPACES = Object.keys(en) as readonly Namespace[];
+
+/** Languages with a folder of texts, in the order in which a person chooses among them. */
+export const LANGUAGES = ['en'] as const;
+export type Language = (typeof LANGUAGES)[number];
+export const DEFAULT_LANGUAGE: Language = 'en';
+
+/** Every text of every language: what a server or a test hands to i18next. */
+export const resources = { en } as const;

@@ -1,0 +1,74 @@
+/** Every address of the application, in one place. `pattern` is for the router, the rest for links. */
+export const PATTERNS = {
+  today: '/',
+  signIn: '/sign-in',
+  welcome: '/welcome',
+  setup: '/set-up',
+  account: '/account',
+  stars: '/stars',
+  star: '/stars/:markerKey',
+  newPlace: '/places/new',
+  place: '/places/:placeId',
+  village: '/village',
+  villagePeople: '/village/people',
+  villagePlaces: '/village/places',
+  villageSettings: '/village/settings',
+  villageRecords: '/village/records',
+  calendars: '/calendars',
+  calendar: '/calendars/:calendarId',
+  versions: '/calendars/:calendarId/versions',
+  version: '/calendars/:calendarId/versions/:number',
+  review: '/calendars/:calendarId/versions/:number/review',
+  compare: '/calendars/:calendarId/compare',
+  sheet: '/calendars/:calendarId/sheet',
+} as const;
+
+type VersionNumber = number | 'draft';
+
+export const paths = {
+  today: () => PATTERNS.today,
+  signIn: (next?: string) => withQuery(PATTERNS.signIn, { next }),
+  welcome: (code?: string) => withQuery(PATTERNS.welcome, { code }),
+  account: () => PATTERNS.account,
+  stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
+  star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>
+    withQuery(`/stars/${encodeURIComponent(markerKey)}`, query),
+  newPlace: () => PATTERNS.newPlace,
+  place: (placeId: string) => `/places/${encodeURIComponent(placeId)}`,
+  village: () => PATTERNS.village,
+  villagePeople: () => PATTERNS.villagePeople,
+  villagePlaces: () => PATTERNS.villagePlaces,
+  villageSettings: () => PATTERNS.villageSettings,
+  villageRecords: () => PATTERNS.villageRecords,
+  calendars: () => PATTERNS.calendars,
+  calendar: (calendarId: string, query: { entry?: string } = {}) =>
+    withQuery(calendarPath(calendarId), query),
+  versions: (calendarId: string) => `${calendarPath(calendarId)}/versions`,
+  version: (calendarId: string, number: VersionNumber) => versionPath(calendarId, number),
+  review: (calendarId: string, number: VersionNumber, query: { entry?: string } = {}) =>
+    withQuery(`${versionPath(calendarId, number)}/review`, query),
+  compare: (calendarId: string, query: { from?: VersionNumber; to?: VersionNumber } = {}) =>
+    withQuery(`${calendarPath(calendarId)}/compare`, query),
+  sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>
+    withQuery(`${calendarPath(calendarId)}/sheet`, query),
+} as const;
+
+/** Where a person goes after signing in: a page of ours, never another site's address. */
+export function safeNext(next: string | null): string {
+  const isOurs = next !== null && /^\/(?![/\\])/u.test(next) && !next.startsWith(PATTERNS.signIn);
+  return isOurs ? next : PATTERNS.today;
+}
+
+function calendarPath(calendarId: string): string {
+  return `/calendars/${encodeURIComponent(calendarId)}`;
+}
+
+function versionPath(calendarId: string, number: VersionNumber): string {
+  return `${calendarPath(calendarId)}/versions/${String(number)}`;
+}
+
+function withQuery(path: string, query: Record<string, string | number | undefined>): string {
+  const search = new URLSearchParams();
+  for (const [key, value] of Object.entries(query)) if (value !== undefined) search.set(key, String(value));
+  return search.size === 0 ? path : `${path}?${search.toString()}`;
+}

@@ -1,0 +1,40 @@
+import { queryOptions, useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
+import { useCallback } from 'react';
+import { sessionEndpoints, type SessionState } from '#shared/contracts/session.js';
+import { callApi } from './api-client.js';
+import { keepCsrfToken } from './csrf.js';
+
+/** Who is here, to which communities they belong, and the token for writes. */
+export const sessionQuery = queryOptions({
+  queryKey: ['session'],
+  queryFn: async ({ signal }) => {
+    const state = await callApi(sessionEndpoints.read, { signal });
+    keepCsrfToken(state.csrfToken);
+    return state;
+  },
+  staleTime: 5 * 60_000,
+});
+
+/** Suspends until the session is known; `person` is null for a visitor. */
+export function useSession(): SessionState {
+  return useSuspenseQuery(sessionQuery).data;
+}
+
+/**
+ * Takes over the answer of a session call. Whatever was read for another person is forgotten, except on a
+ * change of password, where the person stays the same.
+ */
+export function useTakeSession(): (state: SessionState) => void {
+  const client = useQueryClient();
+  return useCallback(
+    (state: SessionState) => {
+      keepCsrfToken(state.csrfToken);
+      const before = client.getQueryData(sessionQuery.queryKey);
+      if (before?.person?.id !== state.person?.id) {
+        client.removeQueries({ predicate: (query) => query.queryKey[0] !== sessionQuery.queryKey[0] });
+      }
+      client.setQueryData(sessionQuery.queryKey, state);
+    },
+    [client],
+  );
+}

@@ -1,0 +1,109 @@
+import { useTranslation } from 'react-i18next';
+import { classNames } from './class-names.js';
+import { Button } from './button.js';
+
+/** A count as pegs in holes: signs in, answers in. */
+export function CountPegs({
+  done,
+  total,
+  label,
+}: {
+  done: number;
+  total: number;
+  label?: string | undefined;
+}) {
+  const { t } = useTranslation('common');
+  return (
+    <span className="count-pegs" role="img" aria-label={label ?? t('pegsDone', { done, total })}>
+      {Array.from({ length: total }, (_, index) => (
+        <i key={index} className={classNames(index < done && 'full')} />
+      ))}
+    </span>
+  );
+}
+
+export interface ProgressPegsProps {
+  total: number;
+  /** Where the peg stands, counted from 0; null for nowhere. */
+  current: number | null;
+  isDone: (index: number) => boolean;
+  label: string;
+}
+
+/** Progress along a row of holes: filled rounds are done, the one with a stem is "here". */
+export function ProgressPegs({ total, current, isDone, label }: ProgressPegsProps) {
+  // Beyond sixty the holes would touch on a phone; then neighbours share a hole.
+  const holes = Math.min(total, 60);
+  const share = total / holes;
+  const here = current === null ? null : Math.min(holes - 1, Math.floor(current / share));
+  return (
+    <svg className="picture" width="100%" height={34} role="img" aria-label={label}>
+      {Array.from({ length: holes }, (_, hole) => {
+        const cx = `${String(((hole + 0.5) / holes) * 100)}%`;
+        const entries = Array.from(
+          { length: Math.max(1, Math.round((hole + 1) * share) - Math.round(hole * share)) },
+          (_each, index) => Math.round(hole * share) + index,
+        );
+        const radius = holes > 24 ? 3.5 : 6;
+        return (
+          <circle
+            key={hole}
+            cx={cx}
+            cy={25}
+            r={radius}
+            strokeWidth={2}
+            className={classNames('pic-hole', entries.every(isDone) && 'full')}
+          />
+        );
+      })}
+      {here !== null && (
+        <Peg x={`${String(((here + 0.5) / holes) * 100)}%`} footY={26} size={holes > 24 ? 0.75 : 1} />
+      )}
+    </svg>
+  );
+}
+
+/** The peg: a filled round with a short stem. `footY` is where the stem ends. */
+export function Peg({ x, footY, size = 1 }: { x: string; footY: number; size?: number | undefined }) {
+  const stem = 14 * size;
+  const head = 9 * size;
+  return (
+    <>
+      <line
+        x1={x}
+        x2={x}
+        y1={footY - stem - head}
+        y2={footY}
+        stroke="var(--color-umber)"
+        strokeWidth={5 * size}
+      />
+      <circle cx={x} cy={footY - stem - head + 6 * size} r={head} className="pic-peg" />
+    </>
+  );
+}
+
+export interface LongWorkProps {
+  label: string;
+  done: number;
+  total: number;
+  onStop?: (() => void) | undefined;
+}
+
+/** Long work counts in holes and can be stopped. */
+export function LongWork({ label, done, total, onStop }: LongWorkProps) {
+  const { t } = useTranslation('common');
+  return (
+    <div className="long-work">
+      <div role="progressbar" aria-label={label} aria-valuemin={0} aria-valuemax={total} aria-valuenow={done}>
+        <ProgressPegs
+          total={total}
+          current={done < total ? done : null}
+          isDone={(index) => index < done}
+          label={label}
+        />
+      </div>
+      {onStop && <Button onClick={onStop}>{t('stop')}</Button>}
+      <p className="col-span-2 text-small">{label}</p>
+    </div>
+  );
+}
