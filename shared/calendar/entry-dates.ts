@@ -1,0 +1,117 @@
+import type { CalendarDate, CivilDay, MarkerYear, Occurrence, SkyNote } from '#shared/sky/index.js';
+import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import type { EntryDates, EntryTiming, EntryWarning, LabelledDay, OccurrenceDays } from './entry-model.js';
+import { ENTRY_WARNINGS } from './entry-model.js';
+import { windowOf } from './window.js';
+
+/** Remarks of the sky that an officer must know before tying work to a marker. */
+const WARNED_NOTES = ['weak-marker', 'never-disappears', 'lost-in-light-nights'] as const satisfies SkyNote[];
+
+/**
+ * What the sky and the rules make of one entry in one civil year. `markerYear` is the leading marker's year at the
+ * calendar's place; it is not asked for where a fixed date leads. The answer rests on this entry alone, so the
+ * same entry always gives the same answer; what two entries have to do with each other is in `overlap.ts`.
+ */
+export function entryDatesOf(timing: EntryTiming, year: number, markerYear: MarkerYear | null): EntryDates {
+  const lead = leadOf(timing, year, markerYear);
+  const warnings = new Set(lead.warnings);
+  let window: EntryDates['window'] = null;
+  if (lead.dayNumber !== null) {
+    const result = windowOf({
+      leadDayNumber: lead.dayNumber,
+      offsets: timing.offsets,
+      lastDate: timing.hasLastDate ? (timing.lastDate?.date ?? null) : null,
+      protectiveWatch: timing.protectiveWatch,
+    });
+    window = result.window;
+    if (result.lastDateEffect === 'closed') warnings.add('window-closed-by-last-date');
+    if (result.lastDateEffect === 'shortened') warnings.add('window-shortened-by-last-date');
+  }
+  if (timing.kind === 'belief' && !timing.agreedToPrint) warnings.add('belief-not-agreed-to-print');
+  return {
+    starOutcome: lead.starOutcome,
+    phenomenonOutcome: lead.phenomenonOutcome,
+    marker: lead.marker,
+    window,
+    warnings: inOrder(warnings),
+  };
+}
+
+/** Warnings once each and in the order of their list, so that equal findings are equal texts. */
+export function inOrder(warnings: ReadonlySet<EntryWarning>): EntryWarning[] {
+  return ENTRY_WARNINGS.filter((warning) => warnings.has(warning));
+}
+
+interface Lead {
+  dayNumber: number | null;
+  starOutcome: EntryDates['starOutcome'];
+  phenomenonOutcome: EntryDates['phenomenonOutcome'];
+  marker: OccurrenceDays | null;
+  warnings: EntryWarning[];
+}
+
+function leadOf({ lead }: EntryTiming, year: number, markerYear: MarkerYear | null): Lead {
+  if (lead.type === 'fixed-date') {
+    return {
+      dayNumber: dayNumberOf(year, lead.date.month, lead.date.day),
+      starOutcome: null,
+      phenomenonOutcome: null,
+      marker: null,
+      warnings: [],
+    };
+  }
+  if (markerYear?.markerKey !== lead.markerKey || markerYear.year !== year) {
+    throw new RangeError(`The entry goes by ${lead.markerKey} in ${year}; another marker's year was given.`);
+  }
+  if (markerYear.outcome !== 'rises-and-sets') {
+    // A star that is always or never there has no first and last days, so there is nothing to say about one of them.
+    return undated(markerYear.outcome, null, 'star-does-not-serve');
+  }
+  const { outcome, occurrences } = markerYear.phenomena[lead.phenomenon];
+  const occurrence = occurrences[lead.occurrence - 1];
+  if (occurrence) {
+    const notes = new Set<SkyNote>([...markerYear.notes, ...occurrence.notes]);
+    return {
+      dayNumber: occurrence.expected.dayNumber,
+      starOutcome: markerYear.outcome,
+      phenomenonOutcome: outcome,
+      marker: occurrenceDaysOf(occurrence),
+      warnings: WARNED_NOTES.filter((note) => notes.has(note)),
+    };
+  }
+  if (occurrences.length > 0) return undated(markerYear.outcome, outcome, 'one-occurrence-only');
+  return undated(
+    markerYear.outcome,
+    outcome,
+    outcome === 'never-dark-enough' ? 'star-does-not-serve' : 'no-date-this-year',
+  );
+}
+
+function undated(
+  starOutcome: EntryDates['starOutcome'],
+  phenomenonOutcome: EntryDates['phenomenonOutcome'],
+  warning: EntryWarning,
+): Lead {
+  return { dayNumber: null, starOutcome, phenomenonOutcome, marker: null, warnings: [warning] };
+}
+
+/** The days of an occurrence without the geometry of its crossings. */
+export function occurrenceDaysOf(occurrence: Occurrence): OccurrenceDays {
+  return {
+    expected: labelled(occurrence.expected),
+    early: occurrence.early && labelled(occurrence.early),
+    late: occurrence.late && labelled(occurrence.late),
+    notes: [...occurrence.notes],
+  };
+}
+
+function labelled({ dayNumber, gregorian, julian }: CivilDay): LabelledDay {
+  return { dayNumber, gregorian: labelOf(gregorian), julian: labelOf(julian) };
+}
+
+/** `YYYY-MM-DD` with the astronomical year, with a minus sign before year 0. */
+function labelOf({ year, month, day }: CalendarDate): string {
+  const digits = String(Math.abs(year)).padStart(4, '0');
+  const monthAndDay = [month, day].map((part) => String(part).padStart(2, '0')).join('-');
+  return `${year < 0 ? '-' : ''}${digits}-${monthAndDay}`;
+}

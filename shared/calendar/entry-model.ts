@@ -1,0 +1,80 @@
+import type { Phenomenon, PhenomenonOutcome, SkyNote, StarOutcome } from '#shared/sky/index.js';
+import type { IsoDate } from '#shared/kernel/iso-date.js';
+
+/**
+ * What the calendar's rules need to know of an entry. The API's own shapes live in the contracts; a test proves
+ * that the two describe the same thing.
+ */
+export interface MonthDay {
+  month: number;
+  day: number;
+}
+
+export type EntryLead =
+  | { type: 'marker'; markerKey: string; phenomenon: Phenomenon; occurrence: 1 | 2 }
+  | { type: 'fixed-date'; date: MonthDay; source: string };
+
+/** Days from the lead day, in order. */
+export interface EntryOffsets {
+  earliestDays: number;
+  bestFromDays: number;
+  bestToDays: number;
+  lastAdvisedDays: number;
+}
+
+/** The part of an entry's content on which its dates and warnings rest. */
+export interface EntryTiming {
+  kind: string;
+  crop: string;
+  lead: EntryLead;
+  offsets: EntryOffsets;
+  hasLastDate: boolean;
+  lastDate: { date: MonthDay; source: string } | null;
+  protectiveWatch: boolean;
+  agreedToPrint: boolean;
+}
+
+export const ENTRY_WARNINGS = [
+  'no-date-this-year',
+  'star-does-not-serve',
+  'one-occurrence-only',
+  'weak-marker',
+  'never-disappears',
+  'lost-in-light-nights',
+  'window-closed-by-last-date',
+  'window-shortened-by-last-date',
+  'belief-not-agreed-to-print',
+  'windows-overlap',
+] as const;
+export type EntryWarning = (typeof ENTRY_WARNINGS)[number];
+
+export interface EntryWindow {
+  earliest: IsoDate;
+  bestFrom: IsoDate;
+  bestTo: IsoDate;
+  lastAdvised: IsoDate;
+  /** Which of the two gave `lastAdvised`: the days counted from the lead, or the fixed last date. */
+  lastAdvisedBy: 'offset' | 'fixed';
+}
+
+/** A civil day with its labels as text, e.g. `2027-06-07`. */
+export interface LabelledDay {
+  dayNumber: number;
+  gregorian: string;
+  julian: string;
+}
+
+export interface OccurrenceDays {
+  expected: LabelledDay;
+  early: LabelledDay | null;
+  late: LabelledDay | null;
+  notes: SkyNote[];
+}
+
+export interface EntryDates {
+  starOutcome: StarOutcome | null;
+  phenomenonOutcome: PhenomenonOutcome | null;
+  marker: OccurrenceDays | null;
+  window: EntryWindow | null;
+  warnings: EntryWarning[];
+}

@@ -1,0 +1,46 @@
+import type { EntryTiming, EntryWindow } from './entry-model.js';
+
+export interface OverlapCandidate {
+  id: string;
+  timing: Pick<EntryTiming, 'kind' | 'crop'>;
+  window: EntryWindow | null;
+}
+
+/**
+ * Ids of entries to warn about with `windows-overlap`.
+ *
+ * In a village's year almost every window overlaps some other one, and that is how it should be; a warning at each
+ * would be read by nobody. It is given only where it nearly always points at a slip: two pieces of farm work on
+ * the same crop, and the best days of the one lie wholly within the best days of the other, so that there is no
+ * best day on which only the narrower one is due. That is what a copy looks like whose offsets were not changed
+ * yet, or a second step that was counted from the wrong star.
+ *
+ * The warning concerns two entries. It is therefore not frozen into a version: an entry must not count as changed,
+ * and be asked about again, because its neighbour was.
+ */
+export function overlappingEntryIds(entries: readonly OverlapCandidate[]): Set<string> {
+  const byCrop = new Map<string, { id: string; window: EntryWindow }[]>();
+  for (const { id, timing, window } of entries) {
+    const crop = timing.crop.normalize('NFC').trim().toLowerCase();
+    if (timing.kind !== 'farm' || crop === '' || window === null) continue;
+    const group = byCrop.get(crop);
+    if (group) group.push({ id, window });
+    else byCrop.set(crop, [{ id, window }]);
+  }
+  const found = new Set<string>();
+  for (const group of byCrop.values()) {
+    group.forEach((entry, index) => {
+      for (const other of group.slice(index + 1)) {
+        if (bestDaysWithin(entry.window, other.window) || bestDaysWithin(other.window, entry.window)) {
+          found.add(entry.id).add(other.id);
+        }
+      }
+    });
+  }
+  return found;
+}
+
+/** ISO dates of four-digit years sort as text. */
+function bestDaysWithin(inner: EntryWindow, outer: EntryWindow): boolean {
+  return inner.bestFrom >= outer.bestFrom && inner.bestTo <= outer.bestTo;
+}
