@@ -71,7 +71,7 @@ async function onDatabase(settings, action) {
   const database = isOurs(settings) ? await running(settings, false) : undefined;
   try {
     const done = await sourceTool(
-      ['server/db/command.ts', action],
+      ['server/db-command.ts', action],
       serverEnvironment(settings, database?.port ?? settings.dbPort),
     );
     return done.code;

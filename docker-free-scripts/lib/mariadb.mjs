@@ -230,11 +230,7 @@ function quoted(text) {
  */
 async function ready({ folder, port, account }, exited) {
   const { createConnection } = await import('mysql2/promise');
-  let ended = false;
-  void exited.then(
-    () => (ended = true),
-    () => (ended = true),
-  );
+  const hasEnded = whether(exited);
   const giveUpAt = Date.now() + READY_WITHIN_MS;
   for (;;) {
     try {
@@ -248,13 +244,23 @@ async function ready({ folder, port, account }, exited) {
       await connection.end();
       return;
     } catch (error) {
-      if (ended || isRefusal(error) || Date.now() > giveUpAt)
+      if (hasEnded() || isRefusal(error) || Date.now() > giveUpAt)
         throw new Remedy(
           `MariaDB did not start (${message(error)}). Its last words, from ${logFile(folder)}:\n${lastErrors(folder)}`,
         );
       await wait(20);
     }
   }
+}
+
+/** @param {Promise<unknown>} happened answers at any moment whether it has */
+function whether(happened) {
+  let already = false;
+  const note = () => {
+    already = true;
+  };
+  happened.then(note, note);
+  return () => already;
 }
 
 /** A wrong password or a missing right does not mend itself by waiting. @param {unknown} error */

@@ -33,10 +33,10 @@ function installedAsLocked() {
   );
 }
 
-/**
- * @param {string} file
- * @returns {Record<string, { version?: string, optional?: boolean }>}
- */
+/** @typedef {{ packages: Record<string, { version?: string, optional?: boolean }> }} LockFile */
+
+/** @param {string} file */
 function packagesIn(file) {
-  return JSON.parse(readFileSync(file, 'utf8')).packages;
+  const lock = /** @type {LockFile} */ (/** @type {unknown} */ (JSON.parse(readFileSync(file, 'utf8'))));
+  return lock.packages;
 }

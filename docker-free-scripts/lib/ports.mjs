@@ -1,6 +1,6 @@
 import { createServer } from 'node:net';
 
-/** @param {number} port @param {string} [host] */
+/** @param {number} port @param {string} [host] @returns {Promise<boolean>} */
 export async function isFree(port, host = '127.0.0.1') {
   const server = createServer();
   return new Promise((resolve) => {

@@ -17,8 +17,9 @@ import path from 'node:path';
  */
 export function keptSecrets(dataDir) {
   const file = path.join(dataDir, 'secrets.json');
-  /** @type {Partial<Secrets>} */
-  const kept = existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : {};
+  const kept = existsSync(file)
+    ? /** @type {Partial<Secrets>} */ (JSON.parse(readFileSync(file, 'utf8')))
+    : {};
   const secrets = {
     databaseRootPassword: kept.databaseRootPassword ?? randomText(),
     databasePassword: kept.databasePassword ?? randomText(),
