@@ -1,10 +1,10 @@
 import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
-import { codeColumn, instantColumn } from './columns.js';
+import { instantColumn } from './columns.js';
 
 /** A browser's session. The id is kept as a hash: a stolen table opens no session. */
 @Entity({ name: 'session' })
 export class SessionEntity {
-  @PrimaryColumn({ name: 'sid_hash', ...codeColumn(64) })
+  @PrimaryColumn({ name: 'sid_hash', type: 'varchar', length: 64, charset: 'ascii', collation: 'ascii_bin' })
   sidHash!: string;
 
   @Index('session_person')

@@ -1,7 +1,7 @@
-import { readConfig } from '#server/config/env.js';
-import { createDataSource } from './data-source.js';
-import { migrate } from './migrate.js';
-import { seedDemo } from './seeds/index.js';
+import { readConfig } from './config/env.js';
+import { createDataSource } from './db/data-source.js';
+import { migrate } from './db/migrate.js';
+import { seedDemo } from './features/demo/demo.service.js';
 
 /** `npm run db:migrate` and `npm run db:seed`: the same steps as a start of the server, without serving. */
 const action = process.argv[2];

@@ -1,0 +1,103 @@
+import compression from 'compression';
+import express, { type Express } from 'express';
+import helmet from 'helmet';
+import { randomUUID } from 'node:crypto';
+import path from 'node:path';
+import { pinoHttp } from 'pino-http';
+import { CommunitiesService } from './features/people/communities.service.js';
+import { peopleRoutes } from './features/people/people.routes.js';
+import { PeopleService } from './features/people/people.service.js';
+import { healthRoutes } from './features/health/health.routes.js';
+import { HealthService } from './features/health/health.service.js';
+import { createPassport } from './features/session/passport.js';
+import { sessionRoutes } from './features/session/session.routes.js';
+import { SessionService } from './features/session/session.service.js';
+import type { AppContext } from './http/context.js';
+import { csrfProtection } from './http/csrf.js';
+import { BODY_LIMIT } from './http/limits.js';
+import { Mount } from './http/mount.js';
+import { nothingHere, problemHandler } from './http/problem-handler.js';
+import { sessions } from './http/session.js';
+
+export interface AppOptions extends AppContext {
+  productVersion: string;
+  /** Folder of the built client; null in tests and in development, where Vite serves it. */
+  clientDir: string | null;
+}
+
+export interface App {
+  express: Express;
+  /** Ids of the endpoints that answer. */
+  mountedIds: readonly string[];
+}
+
+/** Wires the features. It never listens and never reads the environment. */
+export function createApp(options: AppOptions): App {
+  const { dataSource, clock, config, log, productVersion, clientDir } = options;
+  const app = express();
+  app.set('trust proxy', config.trustProxy);
+  app.disable('x-powered-by');
+  app.use(
+    pinoHttp({
+      logger: log,
+      genReqId: () => randomUUID(),
+      // Addresses of people and their words stay out of the log.
+      serializers: {
+        req: (request: { id: unknown; method: unknown; url: unknown }) => ({
+          id: request.id,
+          method: request.method,
+          path: String(request.url).split('?')[0],
+        }),
+        res: (response: { statusCode: unknown }) => ({ status: response.statusCode }),
+      },
+      customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'error' : 'debug'),
+    }),
+  );
+  app.use(
+    helmet({
+      contentSecurityPolicy: {
+        directives: {
+          'default-src': ["'self'"],
+          'img-src': ["'self'", 'data:', 'blob:'],
+          'style-src': ["'self'", "'unsafe-inline'"],
+          'upgrade-insecure-requests': config.secureCookies ? [] : null,
+        },
+      },
+      strictTransportSecurity: config.secureCookies,
+    }),
+  );
+  app.use(compression());
+
+  const sessionService = new SessionService(dataSource, clock);
+  const passport = createPassport(sessionService);
+  const router = express.Router();
+  router.use('/api', express.json({ limit: BODY_LIMIT, strict: false }));
+  router.use('/api', sessions(options), passport.initialize() as never, passport.session() as never);
+  router.use('/api', csrfProtection);
+
+  const mount = new Mount(router, dataSource);
+  healthRoutes(mount, new HealthService(dataSource), productVersion);
+  sessionRoutes(router, mount, sessionService, passport);
+  peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
+
+  app.use(router);
+  app.use('/api', nothingHere);
+  if (clientDir !== null) serveClient(app, clientDir);
+  app.use(nothingHere);
+  app.use(problemHandler(log));
+  return { express: app, mountedIds: mount.ids };
+}
+
+/** Files of the build never change under their name; every other path is a page of the client. */
+function serveClient(app: Express, clientDir: string): void {
+  app.use('/assets', express.static(path.join(clientDir, 'assets'), { immutable: true, maxAge: '1y' }));
+  app.use(express.static(clientDir, { index: false, maxAge: '1h' }));
+  app.get('/{*page}', (request, response, next) => {
+    if (request.accepts('html') === false) {
+      next();
+      return;
+    }
+    response.setHeader('Cache-Control', 'no-cache');
+    response.sendFile(path.join(clientDir, 'index.html'));
+  });
+}

@@ -1,0 +1,20 @@
+import { createHash, randomInt } from 'node:crypto';
+
+/** No 0/O, 1/I/L: the code is read aloud and copied by hand. 31 letters, 12 of them: 59 bits. */
+const ALPHABET = 'ABCDEFGHJKMNPQRSTUVWXYZ23456789';
+const LENGTH = 12;
+export const CODE_LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
+export const CODE_TRIES = 10;
+
+/** A fresh code, in groups of four for reading. */
+export function newCode(): string {
+  const letters = Array.from({ length: LENGTH }, () => ALPHABET[randomInt(ALPHABET.length)]).join('');
+  return letters.replace(/(.{4})(?=.)/gu, '$1-');
+}
+
+/** What is stored of a code or token. Hyphens and case do not count. */
+export function codeHash(code: string): string {
+  return createHash('sha256')
+    .update(code.toUpperCase().replace(/[^A-Z0-9]/gu, ''))
+    .digest('hex');
+}

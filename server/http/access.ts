@@ -1,0 +1,48 @@
+import type { Access } from '#shared/contracts/endpoint.js';
+import type { DataSource } from 'typeorm';
+import { CalendarEntity } from '../db/entities/calendar.entity.js';
+import { MembershipEntity } from '../db/entities/membership.entity.js';
+import { PlaceEntity } from '../db/entities/place.entity.js';
+import type { Actor, Person } from './actor.js';
+import { AppError, notFound } from './app-error.js';
+
+type MemberAccess = Extract<Access, { kind: 'member' }>;
+
+/**
+ * The one gate of every community's data: finds the community that the path belongs to, then the person's
+ * membership, then the role. A stranger learns nothing (404), a member without the role gets 403.
+ */
+export async function admit(
+  dataSource: DataSource,
+  access: MemberAccess,
+  person: Person,
+  params: Readonly<Record<string, string>>,
+): Promise<Actor> {
+  const communityId = await communityOf(dataSource, access.scope, params);
+  const membership =
+    communityId === null
+      ? null
+      : await dataSource
+          .getRepository(MembershipEntity)
+          .findOne({ where: { communityId, personId: person.id } });
+  if (communityId === null || membership === null) throw notFound();
+  if (!access.roles.some((role) => membership.roles.includes(role))) throw new AppError('not-allowed');
+  return { person, communityId, roles: membership.roles };
+}
+
+async function communityOf(
+  dataSource: DataSource,
+  scope: MemberAccess['scope'],
+  params: Readonly<Record<string, string>>,
+): Promise<string | null> {
+  if (scope === 'community') return params['communityId'] ?? null;
+  const id = params[`${scope}Id`] ?? '';
+  const row = await (scope === 'place'
+    ? dataSource
+        .getRepository(PlaceEntity)
+        .findOne({ where: { id }, select: { id: true, communityId: true } })
+    : dataSource
+        .getRepository(CalendarEntity)
+        .findOne({ where: { id }, select: { id: true, communityId: true } }));
+  return row?.communityId ?? null;
+}

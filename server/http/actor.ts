@@ -1,0 +1,24 @@
+import type { Role } from '#shared/contracts/people.js';
+
+/** Who asks. */
+export interface Person {
+  id: string;
+  email: string;
+  displayName: string;
+}
+
+/** Who asks, within the community that the path belongs to. */
+export interface Actor {
+  person: Person;
+  communityId: string;
+  roles: readonly Role[];
+}
+
+export function hasRole(actor: Actor, ...roles: Role[]): boolean {
+  return roles.some((role) => actor.roles.includes(role));
+}
+
+/** Drafts and reviews are for those who compile, review and sign. */
+export function seesDrafts(actor: Actor): boolean {
+  return hasRole(actor, 'officer', 'elder', 'steward');
+}

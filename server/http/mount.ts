@@ -1,0 +1,125 @@
+import type { Endpoint } from '#shared/contracts/endpoint.js';
+import type { Request, Response, Router } from 'express';
+import type { DataSource } from 'typeorm';
+import type { z } from 'zod';
+import { admit } from './access.js';
+import type { Actor, Person } from './actor.js';
+import { AppError, notFound } from './app-error.js';
+import { fieldErrors } from './field-errors.js';
+import { FileReply, sendFile } from './file-reply.js';
+
+type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
+type Answer<E extends Endpoint> = E['fileType'] extends string
+  ? FileReply
+  : E['response'] extends z.ZodType
+    ? z.input<E['response']>
+    : FileReply | undefined;
+
+export interface Call<E extends Endpoint> {
+  params: Parsed<E['params']>;
+  query: Parsed<E['query']>;
+  body: Parsed<E['body']>;
+  request: Request;
+}
+
+type Handler<E extends Endpoint, Who> = (call: Call<E>, who: Who) => Promise<Answer<E>> | Answer<E>;
+
+/** Binds endpoints of the contracts to a router: gate first, then input, then the answer in its schema. */
+export class Mount {
+  /** Ids of all that was mounted; a test holds them against the contracts. */
+  readonly ids: string[] = [];
+
+  constructor(
+    private readonly router: Router,
+    private readonly dataSource: DataSource,
+  ) {}
+
+  forAnybody<E extends Endpoint>(endpoint: E, handler: Handler<E, Person | null>): void {
+    this.expect(endpoint, 'public');
+    this.add(endpoint, async (request, call) => handler(call(), personOf(request)));
+  }
+
+  forPerson<E extends Endpoint>(endpoint: E, handler: Handler<E, Person>): void {
+    this.expect(endpoint, 'signed-in');
+    this.add(endpoint, async (request, call) => {
+      const person = signedIn(request);
+      return handler(call(), person);
+    });
+  }
+
+  forMember<E extends Endpoint>(endpoint: E, handler: Handler<E, Actor>): void {
+    const { access } = endpoint;
+    if (access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
+    this.add(endpoint, async (request, call) => {
+      const person = signedIn(request);
+      const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
+      return handler(call(), actor);
+    });
+  }
+
+  private expect(endpoint: Endpoint, kind: Endpoint['access']['kind']): void {
+    if (endpoint.access.kind !== kind) throw new TypeError(`${endpoint.id} is not ${kind}`);
+  }
+
+  private add<E extends Endpoint>(
+    endpoint: E,
+    handle: (request: Request, call: () => Call<E>) => Promise<Answer<E>>,
+  ): void {
+    this.ids.push(endpoint.id);
+    const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
+    this.router[method](endpoint.path, async (request: Request, response: Response) => {
+      const answer = await handle(request, () => parseCall(endpoint, request));
+      reply(endpoint, response, answer);
+    });
+  }
+}
+
+function personOf(request: Request): Person | null {
+  return request.user ?? null;
+}
+
+function signedIn(request: Request): Person {
+  const person = personOf(request);
+  if (person === null) throw new AppError('not-signed-in');
+  return person;
+}
+
+/** Ids of the path for the gate. One that is no id at all names nothing, so it is not found. */
+function idsOf(endpoint: Endpoint, request: Request): Record<string, string> {
+  const ids = Object.entries(request.params).map(([name, value]) => [name, String(value)] as const);
+  const parsed = endpoint.params?.safeParse(Object.fromEntries(ids));
+  if (parsed?.success === false && parsed.error.issues.some((issue) => /Id$/u.test(String(issue.path[0])))) {
+    throw notFound();
+  }
+  return Object.fromEntries(ids);
+}
+
+function parseCall<E extends Endpoint>(endpoint: E, request: Request): Call<E> {
+  if (endpoint.body !== undefined && request.headers['content-type'] !== undefined && !request.is('json')) {
+    throw new AppError('wrong-content-type');
+  }
+  const parts = {
+    params: endpoint.params?.safeParse({ ...request.params }),
+    query: endpoint.query?.safeParse({ ...request.query }),
+    body: endpoint.body?.safeParse(request.body ?? {}, { reportInput: true }),
+  };
+  const issues = Object.values(parts).flatMap((part) => part?.error?.issues ?? []);
+  if (issues.length > 0) throw new AppError('invalid-input', { errors: fieldErrors(issues) });
+  return {
+    params: parts.params?.data as Parsed<E['params']>,
+    query: parts.query?.data as Parsed<E['query']>,
+    body: parts.body?.data as Parsed<E['body']>,
+    request,
+  };
+}
+
+/** An answer that does not fit its own schema is a fault of ours and must not leave the house. */
+function reply(endpoint: Endpoint, response: Response, answer: unknown): void {
+  if (answer instanceof FileReply) {
+    sendFile(response, endpoint, answer);
+    return;
+  }
+  response.status(endpoint.status).setHeader('Cache-Control', 'no-store');
+  if (endpoint.response === undefined) response.end();
+  else response.json(endpoint.response.parse(answer));
+}

@@ -1,0 +1,86 @@
+import { createHash } from 'node:crypto';
+import { Store, type SessionData } from 'express-session';
+import { LessThan, type DataSource, type EntityManager } from 'typeorm';
+import { SessionEntity } from '../db/entities/session.entity.js';
+import type { Clock } from './context.js';
+
+type Done = (error?: unknown) => void;
+
+/** Sessions in MariaDB. Rows know their person, so that all of a person's sessions can be ended at once. */
+export class SessionStore extends Store {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+  ) {
+    super();
+  }
+
+  override get(sid: string, done: (error: unknown, session?: SessionData | null) => void): void {
+    this.rows
+      .findOne({ where: { sidHash: hashOf(sid) } })
+      .then((row) => {
+        const alive = row !== null && row.expiresAt > this.clock.now();
+        done(null, alive ? (JSON.parse(row.data) as SessionData) : null);
+      })
+      .catch((error: unknown) => {
+        done(error);
+      });
+  }
+
+  override set(sid: string, session: SessionData, done: Done = ignore): void {
+    const lifetimeMs = session.cookie.originalMaxAge ?? 0;
+    const row = {
+      sidHash: hashOf(sid),
+      personId: personIdOf(session),
+      data: JSON.stringify(session),
+      expiresAt: new Date(this.clock.now().getTime() + lifetimeMs),
+    };
+    settle(this.rows.upsert(row, ['sidHash']), done);
+  }
+
+  override destroy(sid: string, done: Done = ignore): void {
+    settle(this.rows.delete({ sidHash: hashOf(sid) }), done);
+  }
+
+  override touch(sid: string, session: SessionData, done: Done = ignore): void {
+    this.set(sid, session, done);
+  }
+
+  /** Rows whose time is over; called at the start and once a day. */
+  async removeExpired(): Promise<void> {
+    await this.rows.delete({ expiresAt: LessThan(this.clock.now()) });
+  }
+
+  private get rows() {
+    return this.dataSource.getRepository(SessionEntity);
+  }
+}
+
+/** Ends every session of a person, on all devices. */
+export async function endSessionsOf(manager: EntityManager, personId: string): Promise<void> {
+  await manager.delete(SessionEntity, { personId });
+}
+
+/** What the browser holds opens a session; what the table holds does not. */
+function hashOf(sid: string): string {
+  return createHash('sha256').update(sid).digest('hex');
+}
+
+function personIdOf(session: SessionData): string | null {
+  return (session as SessionData & { passport?: { user?: string } }).passport?.user ?? null;
+}
+
+function settle(work: Promise<unknown>, done: Done): void {
+  work.then(
+    () => {
+      done();
+    },
+    (error: unknown) => {
+      done(error);
+    },
+  );
+}
+
+function ignore(): void {
+  // express-session may call without a callback
+}

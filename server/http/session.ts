@@ -1,0 +1,21 @@
+import session from 'express-session';
+import type { RequestHandler } from 'express';
+import type { AppContext } from './context.js';
+import { SessionStore } from './session-store.js';
+
+const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
+export const SESSION_COOKIE = 'dawnpeg.session';
+
+/** Sessions in the database behind a cookie that scripts cannot read. */
+export function sessions({ dataSource, config, clock }: AppContext): RequestHandler {
+  return session({
+    name: SESSION_COOKIE,
+    secret: config.sessionSecret,
+    store: new SessionStore(dataSource, clock),
+    resave: false,
+    saveUninitialized: false,
+    rolling: true,
+    proxy: config.trustProxy > 0,
+    cookie: { httpOnly: true, sameSite: 'lax', secure: config.secureCookies, maxAge: LIFETIME_MS, path: '/' },
+  });
+}

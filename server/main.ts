@@ -1,0 +1,116 @@
+import { existsSync, readFileSync } from 'node:fs';
+import type { Server } from 'node:http';
+import path from 'node:path';
+import { pino, type Logger } from 'pino';
+import type { DataSource } from 'typeorm';
+import { createApp } from './app.js';
+import { ConfigError, readConfig, type Config } from './config/env.js';
+import { createDataSource } from './db/data-source.js';
+import { DatabaseUnfitError, migrate } from './db/migrate.js';
+import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
+import { firstStewardToken } from './features/session/first-start.service.js';
+import type { Clock } from './http/context.js';
+
+/** A reason not to start that the person at the machine can mend: one sentence, no stack. */
+class StartRefused extends Error {}
+
+async function main(): Promise<void> {
+  const config = readConfig();
+  const log = pino({ level: config.logLevel });
+  const clock: Clock = { now: () => config.fixedNow ?? new Date() };
+  const dataSource = createDataSource(config.database);
+  await dataSource.initialize();
+  try {
+    await migrate(dataSource);
+    await prepareAccounts(dataSource, config, clock);
+    const { express } = createApp({
+      dataSource,
+      config,
+      clock,
+      log,
+      productVersion: productVersion(),
+      clientDir: clientDir(),
+    });
+    const server = await listen(express, config);
+    log.info({ address: config.publicUrl }, 'listening');
+    closeOnSignal(server, dataSource, log);
+  } catch (error) {
+    await dataSource.destroy();
+    throw error;
+  }
+}
+
+async function prepareAccounts(dataSource: DataSource, config: Config, clock: Clock): Promise<void> {
+  if (config.demo) {
+    await seedDemo(dataSource, clock);
+    return;
+  }
+  if (config.nodeEnv === 'production' && (await holdsDemoAccounts(dataSource))) {
+    throw new StartRefused(
+      `The database ${config.database.name} holds demo accounts, whose password everybody knows: set DB_NAME to another database, or run npm run db:reset.`,
+    );
+  }
+  const token = await firstStewardToken(dataSource, clock);
+  if (token !== null) {
+    process.stdout.write(
+      `\nNobody has an account yet. The first steward opens this link once, within a week:\n  ${config.publicUrl}/welcome#first-steward=${token}\n\n`,
+    );
+  }
+}
+
+function listen(express: ReturnType<typeof createApp>['express'], config: Config): Promise<Server> {
+  return new Promise((resolve, reject) => {
+    const server = express.listen(config.port, config.host, (error?: Error) => {
+      if (error) {
+        reject(
+          new StartRefused(`PORT ${config.port} cannot be used (${error.message}): set PORT to a free one.`),
+        );
+      } else {
+        resolve(server);
+      }
+    });
+  });
+}
+
+/** Answers what has begun, then lets go of the database; a second signal does not hurry it into a loss. */
+function closeOnSignal(server: Server, dataSource: DataSource, log: Logger): void {
+  let closing = false;
+  const close = () => {
+    if (closing) return;
+    closing = true;
+    server.close(() => {
+      void dataSource.destroy().finally(() => {
+        log.info('closed');
+      });
+    });
+    server.closeIdleConnections();
+  };
+  for (const signal of ['SIGTERM', 'SIGINT', 'SIGHUP'] as const) process.on(signal, close);
+}
+
+/** From source and from the build alike, the project is the nearest folder above with a package.json. */
+function projectDir(): string {
+  let folder = import.meta.dirname;
+  while (!existsSync(path.join(folder, 'package.json'))) folder = path.dirname(folder);
+  return folder;
+}
+
+function productVersion(): string {
+  const { version } = JSON.parse(readFileSync(path.join(projectDir(), 'package.json'), 'utf8')) as {
+    version: string;
+  };
+  return version;
+}
+
+/** Without a build (in development) Vite serves the pages. */
+function clientDir(): string | null {
+  const folder = path.join(projectDir(), 'dist', 'client');
+  return existsSync(path.join(folder, 'index.html')) ? folder : null;
+}
+
+main().catch((error: unknown) => {
+  const plain =
+    error instanceof ConfigError || error instanceof DatabaseUnfitError || error instanceof StartRefused;
+  process.stderr.write(`${plain ? error.message : String(error instanceof Error ? error.stack : error)}\n`);
+  process.exitCode = 1;
+});
