@@ -1,3 +1,4 @@
+import type { SignOffRule } from '#shared/contracts/people.js';
 import type { VersionState } from '#shared/contracts/versions.js';
 import {
   Column,
@@ -49,6 +50,14 @@ export class CalendarVersionEntity {
 
   @Column({ ...sha256Column })
   hash!: string;
+
+  /** As it stood when the draft was submitted: who has to sign does not change in the middle of a review. */
+  @Column({ name: 'sign_off_rule', type: 'json' })
+  signOffRule!: SignOffRule;
+
+  /** Whoever had written to the draft since the last published version; they cannot sign this one. */
+  @Column({ name: 'writer_ids', type: 'json' })
+  writerIds!: string[];
 
   @Column({ name: 'submitted_by', type: 'uuid' })
   submittedBy!: string;
