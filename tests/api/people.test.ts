@@ -1,0 +1,165 @@
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import type { AddedPerson, Community, CommunityPerson } from '#shared/contracts/people.js';
+import type { Problem } from '#shared/contracts/problem.js';
+import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+
+let api: TestApi;
+let steward: Client;
+let people: string;
+beforeAll(async () => {
+  api = await openTestApi();
+});
+beforeEach(async () => {
+  await api.reset();
+  steward = await api.signIn('steward');
+  people = `/api/communities/${steward.communityId}/people`;
+});
+afterAll(() => api.close());
+
+const newcomer = { email: 'Talu@example.org', displayName: 'Talu', roles: ['observer'] };
+
+async function add(input: object = newcomer): Promise<AddedPerson> {
+  return (await steward.post(people, input).expect(201)).body as AddedPerson;
+}
+async function find(displayName: string): Promise<CommunityPerson> {
+  const { items } = (await steward.get(people).expect(200)).body as { items: CommunityPerson[] };
+  const person = items.find((item) => item.displayName === displayName);
+  if (!person) throw new Error(`no ${displayName}`);
+  return person;
+}
+
+describe('adding a person', () => {
+  it('shows a one-time code once, with which the person sets a password and is signed in', async () => {
+    const { person, oneTimeCode } = await add();
+    expect(person).toMatchObject({ email: 'talu@example.org', active: false, roles: ['observer'] });
+    expect(oneTimeCode).toMatch(/^[A-Z2-9]{4}-[A-Z2-9]{4}-[A-Z2-9]{4}$/);
+
+    const browser = await api.visitor();
+    const typed = (oneTimeCode ?? '').toLowerCase().replaceAll('-', ' ');
+    const redeem = { email: newcomer.email, code: typed, newPassword: 'holes and pegs' };
+    const answer = await browser.post('/api/session/code', redeem).expect(200);
+    expect(answer.body).toMatchObject({
+      person: { displayName: 'Talu' },
+      memberships: [{ roles: ['observer'] }],
+    });
+    expect((await find('Talu')).active).toBe(true);
+  });
+
+  const redeem = async (code: string | null) =>
+    (await api.visitor()).post('/api/session/code', {
+      email: newcomer.email,
+      code,
+      newPassword: 'holes and pegs',
+    });
+
+  it('gives a code that works once only', async () => {
+    const { oneTimeCode } = await add();
+    expect((await redeem(oneTimeCode)).status).toBe(200);
+    const again = await redeem(oneTimeCode);
+    expect(again.status).toBe(422);
+    expect((again.body as Problem).type).toBe('/problems/code-not-valid');
+  });
+
+  it('gives a code that works for two weeks only', async () => {
+    const { oneTimeCode } = await add();
+    api.clock.set(new Date('2026-12-15T06:00:01Z'));
+    expect((await redeem(oneTimeCode)).status).toBe(422);
+  });
+
+  it('gives a code that is void after ten wrong tries, however slowly they come', async () => {
+    const { oneTimeCode } = await add();
+    for (let tries = 0; tries < 10; tries += 1) await redeem('ABCD-EFGH-JKMN');
+    api.restart();
+    expect((await redeem(oneTimeCode)).status).toBe(422);
+  });
+
+  it('ends the old code when a new one is made', async () => {
+    const { person, oneTimeCode: old } = await add();
+    const renewed = (await steward.post(`${people}/${person.id}/code`).expect(201)).body as AddedPerson;
+    expect((await redeem(old)).status).toBe(422);
+    expect((await redeem(renewed.oneTimeCode)).status).toBe(200);
+  });
+
+  it('lets somebody from another village join with the account they have', async () => {
+    const { person, oneTimeCode } = await add({
+      email: 'officer2@dawnpeg.example',
+      displayName: 'Somebody',
+      roles: ['officer'],
+    });
+    expect(oneTimeCode).toBeNull();
+    expect(person.displayName).toBe('Lume');
+  });
+
+  it('answers 409 for a person who belongs to the village already', async () => {
+    const answer = await steward.post(people, { ...newcomer, email: 'officer@dawnpeg.example' });
+    expect(answer.status).toBe(409);
+    expect((answer.body as Problem).reason).toBe('email-known');
+  });
+});
+
+describe('roles', () => {
+  it('count from the next request on', async () => {
+    const staff = await api.signIn('staff');
+    await staff.get(people).expect(403);
+    const { id, version } = await find('Irvel');
+    await steward.put(`${people}/${id}`, { roles: ['staff', 'officer'], version }).expect(200);
+    await staff.get(people).expect(200);
+  });
+
+  it('answers 409 with both states to a save over a newer one', async () => {
+    const { id, version } = await find('Irvel');
+    await steward.put(`${people}/${id}`, { roles: ['staff', 'observer'], version }).expect(200);
+    const answer = await steward.put(`${people}/${id}`, { roles: ['officer'], version });
+    expect(answer.status).toBe(409);
+    expect(answer.body).toMatchObject({
+      type: '/problems/stale',
+      current: { roles: ['staff', 'observer'] },
+      sent: { roles: ['officer'] },
+    });
+  });
+
+  it('never leave a village without a steward, nor its rule without the elder it names', async () => {
+    const ostrel = await find('Ostrel');
+    const last = await steward.put(`${people}/${ostrel.id}`, { roles: ['staff'], version: ostrel.version });
+    expect((last.body as Problem).reason).toBe('last-steward');
+    const elder = await find('Elder A-2');
+    const named = await steward.delete(`${people}/${elder.id}`);
+    expect((named.body as Problem).reason).toBe('named-in-rule');
+  });
+
+  it('end with the membership, and what belonged to the village with them', async () => {
+    const staff = await api.signIn('staff');
+    const { id } = await find('Irvel');
+    await steward.delete(`${people}/${id}`).expect(204);
+    await staff.get(`/api/communities/${steward.communityId}`).expect(404);
+  });
+
+  it('decide who sees e-mail addresses', async () => {
+    const officer = await api.signIn('officer');
+    const { items } = (await officer.get(people).expect(200)).body as { items: CommunityPerson[] };
+    expect(items.map((person) => person.email)).toEqual(items.map(() => ''));
+  });
+});
+
+describe('settings', () => {
+  it('are saved by the steward, and a stale save answers 409 with both states', async () => {
+    const path = `/api/communities/${steward.communityId}`;
+    const { id: _id, ...settings } = (await steward.get(path)).body as Community;
+    const saved = (await steward.put(path, { ...settings, weatherContact: 'Call 111' }).expect(200))
+      .body as Community;
+    expect(saved).toMatchObject({ weatherContact: 'Call 111', version: settings.version + 1 });
+    const late = await steward.put(path, { ...settings, weatherContact: 'Call 222' });
+    expect(late.status).toBe(409);
+    expect((late.body as Problem).current).toMatchObject({ weatherContact: 'Call 111' });
+  });
+
+  it('name only elders of the village in the sign-off rule, and ask for no more than there are', async () => {
+    const path = `/api/communities/${steward.communityId}`;
+    const { id: _id, ...settings } = (await steward.get(path)).body as Community;
+    const withRule = (rule: object) => ({ ...settings, signOffRule: { ...settings.signOffRule, ...rule } });
+    const stranger = await steward.put(path, withRule({ mustSign: [steward.personId] }));
+    expect((stranger.body as Problem).reason).toBe('members-missing');
+    const tooMany = await steward.put(path, withRule({ minElders: 4 }));
+    expect((tooMany.body as Problem).reason).toBe('rule-impossible');
+  });
+});

@@ -1,0 +1,120 @@
+import { pino } from 'pino';
+import request from 'supertest';
+import type { Response, Test } from 'supertest';
+import type { DataSource } from 'typeorm';
+import { createApp, type App } from '#server/app.js';
+import { parseConfig } from '#server/config/env.js';
+import { DEMO_DOMAIN, DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
+import { seedDemo } from '#server/features/demo/demo.service.js';
+import type { SessionState } from '#shared/contracts/session.js';
+import { emptyTestDatabase, openTestDatabase } from './database.js';
+
+/** A morning on which the demo year has just begun; tests move it on by hand. */
+export const TEST_NOW = new Date('2026-12-01T06:00:00Z');
+
+export interface TestApi {
+  dataSource: DataSource;
+  app: App;
+  clock: { now(): Date; set(now: Date): void };
+  /** A new browser without a sign-in. */
+  visitor(): Promise<Client>;
+  /** A browser signed in as a demo person, by the mailbox name, e.g. `officer`. */
+  signIn(mailbox: string): Promise<Client>;
+  /** The same database behind a new process: what is only remembered in memory (limits) is gone. */
+  restart(): void;
+  /** Empty tables and fresh demo villages. */
+  reset(): Promise<void>;
+  close(): Promise<void>;
+}
+
+/** One browser: keeps its cookie and sends the token with every write. */
+export interface Client {
+  session: SessionState;
+  get(path: string): Test;
+  post(path: string, body?: unknown): Test;
+  put(path: string, body?: unknown): Test;
+  delete(path: string): Test;
+  /** Community of the first membership. */
+  communityId: string;
+  personId: string;
+}
+
+/** The product on this worker's own database, with the demo villages and a clock that stands still. */
+export async function openTestApi(): Promise<TestApi> {
+  const dataSource = await openTestDatabase();
+  let now = TEST_NOW;
+  const clock = {
+    now: () => now,
+    set: (next: Date) => {
+      now = next;
+    },
+  };
+  const config = parseConfig({
+    NODE_ENV: 'test',
+    DB_PASSWORD: 'unused here',
+    SESSION_SECRET: 'only for tests, never for a village',
+  });
+  const build = () =>
+    createApp({
+      dataSource,
+      clock,
+      config,
+      log: pino({ level: 'silent' }),
+      productVersion: 'test',
+      clientDir: null,
+    });
+  const api: TestApi = {
+    dataSource,
+    app: build(),
+    clock,
+    visitor: () => openClient(api.app),
+    signIn: async (mailbox) => {
+      const client = await openClient(api.app);
+      const answer = await client.post('/api/session', {
+        email: `${mailbox}@${DEMO_DOMAIN}`,
+        password: DEMO_PASSWORD,
+      });
+      if (answer.status !== 200) throw new Error(`${mailbox} cannot sign in: ${JSON.stringify(answer.body)}`);
+      return client;
+    },
+    reset: async () => {
+      now = TEST_NOW;
+      await emptyTestDatabase(dataSource);
+      await seedDemo(dataSource, clock);
+      api.restart();
+    },
+    restart: () => {
+      api.app = build();
+    },
+    close: () => dataSource.destroy(),
+  };
+  await seedDemo(dataSource, clock);
+  return api;
+}
+
+async function openClient(app: App): Promise<Client> {
+  const agent = request.agent(app.express);
+  const read = async () => (await agent.get('/api/session')).body as SessionState;
+  const client: Client = {
+    session: await read(),
+    get: (path) => agent.get(path),
+    post: (path, body) => write(agent.post(path), body),
+    put: (path, body) => write(agent.put(path), body),
+    delete: (path) => write(agent.delete(path)),
+    get communityId() {
+      return this.session.memberships?.[0]?.communityId ?? '';
+    },
+    get personId() {
+      return this.session.person?.id ?? '';
+    },
+  };
+  function write(test: Test, body?: unknown): Test {
+    const sent = test.set('X-CSRF-Token', client.session.csrfToken);
+    sent.on('response', (response: Response) => {
+      const next = response.body as Partial<SessionState> | undefined;
+      if (typeof next?.csrfToken === 'string') client.session = next as SessionState;
+    });
+    return body === undefined ? sent : sent.send(body as object);
+  }
+  return client;
+}
