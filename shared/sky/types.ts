@@ -147,4 +147,41 @@ export interface WatchTimes {
   startLookingJdUt: number | null;
   flatSunriseJdUt: number | null;
   flatSunsetJdUt: number | null;
+  /** The Sun's upper edge over the place's own skyline. */
+  skylineSunriseJdUt: number | null;
+  skylineSunsetJdUt: number | null;
+}
+
+/** One question of the `dates` command: a level skyline, thresholds exactly as given, local mean solar time. */
+export interface DepthAtCrossingCase {
+  hr: number;
+  latitudeDeg: number;
+  longitudeDeg: number;
+  year: number;
+  /** Altitude of the skyline all around. */
+  skylineDeg: number;
+  /** Needed depths of the Sun; 0 asks for the true phases, which are geometry and cannot be seen. */
+  thresholdsDeg: { sameSide: number; oppositeSide: number };
+}
+
+export interface DepthAtCrossingYear {
+  outcome: StarOutcome;
+  outcomeDetail: StarOutcomeDetail | null;
+  /** Null unless the outcome is `rises-and-sets`. Day numbers of the civil year, ascending; mostly one, at times none or two. */
+  dayNumbers: Readonly<Record<Phenomenon, readonly number[]>> | null;
+}
+
+/** Expected dates of many stars, packed: one row of four columns per star in the order of PHENOMENA. */
+export interface ExpectedDates {
+  hrs: readonly number[];
+  /** First day number of the phenomenon in the civil year; 0 where there is none. */
+  dayNumbers: Int32Array;
+}
+
+export const MOON_QUARTERS = ['new', 'first-quarter', 'full', 'last-quarter'] as const;
+export type MoonQuarter = (typeof MOON_QUARTERS)[number];
+
+export interface MoonPhase {
+  quarter: MoonQuarter;
+  jdUt: number;
 }

@@ -1,0 +1,29 @@
+/** The sixteen directions of a compass card, clockwise from north. */
+export const COMPASS_POINTS = [
+  'n',
+  'nne',
+  'ne',
+  'ene',
+  'e',
+  'ese',
+  'se',
+  'sse',
+  's',
+  'ssw',
+  'sw',
+  'wsw',
+  'w',
+  'wnw',
+  'nw',
+  'nnw',
+] as const;
+export type CompassPoint = (typeof COMPASS_POINTS)[number];
+
+const DEG_PER_POINT = 360 / COMPASS_POINTS.length;
+
+/** The nearest of the sixteen directions; an azimuth right between two belongs to the one further clockwise. */
+export function compassPoint(azimuthDeg: number): CompassPoint {
+  const turns = Math.round(azimuthDeg / DEG_PER_POINT);
+  const index = ((turns % COMPASS_POINTS.length) + COMPASS_POINTS.length) % COMPASS_POINTS.length;
+  return COMPASS_POINTS[index] ?? 'n';
+}

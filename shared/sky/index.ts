@@ -1,0 +1,217 @@
+/**
+ * The one door of the numeric core: it checks arguments (SkyRangeError names the field and the remedy), takes degrees
+ * and gives words and numbers. Nothing here reads a clock, a file or a screen; the same question has the same answer.
+ *
+ * Conventions: east longitude positive; azimuth from north through east; astronomical years (0 = 1 BC), Gregorian
+ * from 1583 and Julian before; times are Julian Days of UT (`jdUt`); star and Sun without refraction, Sun's centre.
+ * Sources: SOURCES.md.
+ */
+import {
+  assertDate,
+  assertDayNumber,
+  assertFinite,
+  assertLongitude,
+  assertQuestion,
+  assertSettings,
+  assertSite,
+  assertYear,
+} from './argument-checks.js';
+import { type CompassPoint, compassPoint as nearestPoint } from './horizon/compass.js';
+import { latitudeOf } from './horizon/horizontal.js';
+import { prepareSkyline } from './horizon/skyline.js';
+import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
+import { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
+import { markerYearOf } from './markers/marker-year.js';
+import { markerAtPlace, placeYearOf } from './markers/place-year.js';
+import { yearStripOf } from './markers/year-strip.js';
+import { moonPhasesOf } from './phenomena/moon-phases.js';
+import { type PreparedYear, prepareYear as prepare } from './phenomena/prepared-year.js';
+import { watchTimesOf } from './phenomena/watch-times.js';
+import { preparedYearOf } from './phenomena/year-cache.js';
+import { dayClockOf, labelledDay } from './time/civil-day.js';
+import { FIRST_GREGORIAN_YEAR } from './time/civil-year.js';
+import {
+  type Calendar,
+  dayNumberOf as countDays,
+  gregorianOf as gregorianLabel,
+  julianOf as julianLabel,
+} from './time/julian-day.js';
+import { assertTimeZone } from './time/zone-offset.js';
+import type {
+  CalendarDate,
+  CivilDay,
+  DepthAtCrossingCase,
+  DepthAtCrossingYear,
+  ExpectedDates,
+  MarkerKey,
+  MarkerYear,
+  MoonPhase,
+  Site,
+  SkylinePoint,
+  StripSegment,
+  VisibilitySettings,
+  WatchTimes,
+} from './types.js';
+import { RAD_PER_DEG, DEG_PER_RAD } from './units/angle.js';
+import { SkyRangeError } from './units/sky-range-error.js';
+
+export type * from './types.js';
+export * from './vocabulary.js';
+export { MOON_QUARTERS } from './types.js';
+export { ELEVATION_M, SHIFT_DEG, SKYLINE_ALTITUDE_DEG, THRESHOLD_DEG } from './argument-checks.js';
+export { COMPASS_POINTS, type CompassPoint } from './horizon/compass.js';
+export { FIGURES } from './markers/figures.js';
+export { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
+export type { PreparedYear } from './phenomena/prepared-year.js';
+export { findStar, STARS } from './stars/star-table.js';
+export type { Calendar } from './time/julian-day.js';
+export { SkyRangeError } from './units/sky-range-error.js';
+export { CLARITY_SHIFT_DEG } from './visibility/clarity.js';
+export {
+  THRESHOLD_CONVENTION,
+  THRESHOLD_SET_FACTS,
+  type ThresholdSetFacts,
+} from './visibility/threshold-sets.js';
+
+function markerOf(markerKey: MarkerKey): ResolvedMarker {
+  const marker = resolveMarker(markerKey);
+  if (!marker) {
+    throw new SkyRangeError(
+      'markerKey',
+      `"${markerKey}" is no marker; give hr and a number of the star table, or a figure.`,
+    );
+  }
+  return marker;
+}
+
+/**
+ * Prepares a year once for many places (Sun, obliquity, precession, sidereal time). The functions below do this by
+ * themselves and keep the last years; hand one over only to measure or to control the work.
+ */
+export function prepareYear(year: number): PreparedYear {
+  assertYear(year);
+  return prepare(year);
+}
+
+/** The year of one star or figure at a place: outcome, four phenomena with ranges, nights hidden, notes, basis. */
+export function computeMarkerYear(
+  markerKey: MarkerKey,
+  site: Site,
+  settings: VisibilitySettings,
+  year: number,
+): MarkerYear {
+  return computeSkyYear([markerKey], site, settings, year)[0] as MarkerYear;
+}
+
+/** The same for many markers; place and year are prepared once. Results in the order of the keys. */
+export function computeSkyYear(
+  markerKeys: readonly MarkerKey[],
+  site: Site,
+  settings: VisibilitySettings,
+  year: number,
+): MarkerYear[] {
+  assertSite(site);
+  assertSettings(settings);
+  assertYear(year);
+  const markers = markerKeys.map(markerOf);
+  const placeYear = placeYearOf(preparedYearOf(year), site, settings);
+  return markers.map((marker) => markerYearOf(placeYear, marker));
+}
+
+/**
+ * Expected days of the whole star table, without ranges: 4 day numbers per star in the order of PHENOMENA, 0 where
+ * there is none in the civil year (the first one where there are two).
+ */
+export function expectedDates(
+  site: Site,
+  settings: VisibilitySettings,
+  year: number,
+  prepared?: PreparedYear,
+): ExpectedDates {
+  assertSite(site);
+  assertSettings(settings);
+  assertYear(year);
+  return expectedDatesOf(prepared ?? preparedYearOf(year), site, settings);
+}
+
+/** Dates by the depth at the crossing with thresholds exactly as given: the rule of the `dates` command. */
+export function depthAtCrossingYear(question: DepthAtCrossingCase): DepthAtCrossingYear {
+  assertQuestion(question);
+  const marker = resolveMarker(markerKeyOf(question.hr));
+  if (!marker) throw new SkyRangeError('hr', `Give an HR number of the star table; ${JSON.stringify(question.hr) ?? 'nothing'} is not in it.`);
+  return depthAtCrossingOf(preparedYearOf(question.year), marker, question);
+}
+
+/**
+ * What the marker does on each night of the civil year, as runs of nights in one state. A night runs from noon to noon
+ * and carries the day number of its evening: the first morning seen on day N belongs to the night N − 1.
+ * @param markerYear a result of computeMarkerYear for the same site and settings
+ */
+export function yearStrip(markerYear: MarkerYear, site: Site, settings: VisibilitySettings): StripSegment[] {
+  assertSite(site);
+  assertSettings(settings);
+  assertYear(markerYear.year);
+  const placeYear = placeYearOf(preparedYearOf(markerYear.year), site, settings);
+  return yearStripOf(markerAtPlace(placeYear, markerOf(markerYear.markerKey)));
+}
+
+/** When to stop looking in the morning and to begin in the evening of a civil day, so that nobody looks at the Sun. */
+export function watchTimes(site: Site, dayNumber: number): WatchTimes {
+  assertSite(site);
+  assertDayNumber(dayNumber);
+  const gregorianYear = gregorianLabel(dayNumber).year;
+  const year = gregorianYear >= FIRST_GREGORIAN_YEAR ? gregorianYear : julianLabel(dayNumber).year;
+  assertYear(year, 'dayNumber');
+  const clock = dayClockOf(site.timeZone, site.longitudeDeg);
+  const ground = {
+    latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
+    longitudeRad: site.longitudeDeg * RAD_PER_DEG,
+    skyline: prepareSkyline(site.skyline),
+  };
+  const meanNoonJdUt = dayNumber - site.longitudeDeg / 360;
+  return watchTimesOf(preparedYearOf(year), ground, dayNumber - clock.offsetDays(meanNoonJdUt));
+}
+
+/** Altitude of a skyline in a direction; points are joined by straight lines, 0° and 360° are one point. */
+export function skylineAltitudeDeg(skyline: readonly SkylinePoint[], azimuthDeg: number): number {
+  assertFinite('azimuthDeg', azimuthDeg);
+  return prepareSkyline(skyline).altitudeRad(azimuthDeg * RAD_PER_DEG) * DEG_PER_RAD;
+}
+
+/** The nearest of sixteen compass directions. */
+export function compassPoint(azimuthDeg: number): CompassPoint {
+  assertFinite('azimuthDeg', azimuthDeg);
+  return nearestPoint(azimuthDeg);
+}
+
+/** Instants of new, half and full Moon in a civil year, with a day to either side for the clocks of other zones. */
+export function moonPhases(year: number): MoonPhase[] {
+  assertYear(year);
+  return moonPhasesOf(year);
+}
+
+/** Julian Day Number (at noon) of a calendar date. */
+export function dayNumberOf(date: CalendarDate, calendar: Calendar): number {
+  assertDate(date, calendar);
+  return countDays(date, calendar);
+}
+
+/** Proleptic Gregorian label of a day number. */
+export function gregorianOf(dayNumber: number): CalendarDate {
+  assertDayNumber(dayNumber);
+  return gregorianLabel(dayNumber);
+}
+
+/** Proleptic Julian label of a day number. */
+export function julianOf(dayNumber: number): CalendarDate {
+  assertDayNumber(dayNumber);
+  return julianLabel(dayNumber);
+}
+
+/** The civil day that holds an instant: the zone's from 1900 on, local mean solar time before or without a zone. */
+export function civilDayOf(jdUt: number, timeZone: string | null, longitudeDeg: number): CivilDay {
+  assertFinite('jdUt', jdUt);
+  assertLongitude(longitudeDeg, 'longitudeDeg');
+  if (timeZone !== null) assertTimeZone(timeZone);
+  return labelledDay(dayClockOf(timeZone, longitudeDeg).dayOf(jdUt));
+}

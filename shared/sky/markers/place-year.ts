@@ -1,0 +1,50 @@
+import { latitudeOf } from '../horizon/horizontal.js';
+import { prepareSkyline } from '../horizon/skyline.js';
+import type { PreparedYear } from '../phenomena/prepared-year.js';
+import { type Ground, type StarAtPlace, starAtPlace } from '../phenomena/skyline-crossing.js';
+import { starIndexOf } from '../stars/star-table.js';
+import { type DayClock, dayClockOf } from '../time/civil-day.js';
+import type { Site, VisibilitySettings } from '../types.js';
+import { RAD_PER_DEG } from '../units/angle.js';
+import { type Threshold, thresholdOf } from '../visibility/threshold-sets.js';
+import type { ResolvedMarker } from './marker-key.js';
+
+/** A place in a prepared year. */
+export interface PlaceYear {
+  year: PreparedYear;
+  ground: Ground;
+  clock: DayClock;
+  settings: VisibilitySettings;
+}
+
+export function placeYearOf(year: PreparedYear, site: Site, settings: VisibilitySettings): PlaceYear {
+  return {
+    year,
+    ground: {
+      latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
+      longitudeRad: site.longitudeDeg * RAD_PER_DEG,
+      skyline: prepareSkyline(site.skyline),
+    },
+    clock: dayClockOf(site.timeZone, site.longitudeDeg),
+    settings,
+  };
+}
+
+/** A marker at a place in a prepared year: its path over the skyline and its threshold. */
+export interface MarkerAtPlace extends PlaceYear {
+  marker: ResolvedMarker;
+  starIndex: number;
+  star: StarAtPlace;
+  threshold: Threshold;
+}
+
+export function markerAtPlace(placeYear: PlaceYear, marker: ResolvedMarker): MarkerAtPlace {
+  const starIndex = starIndexOf(marker.hr) ?? 0;
+  return {
+    ...placeYear,
+    marker,
+    starIndex,
+    star: starAtPlace(placeYear.year, placeYear.ground, starIndex),
+    threshold: thresholdOf(placeYear.settings.thresholdSet, marker.vMag, marker.override),
+  };
+}

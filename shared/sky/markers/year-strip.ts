@@ -1,0 +1,99 @@
+import { crossingAtDeepest } from '../phenomena/dark-arc.js';
+import type { SkylineCrossing } from '../phenomena/skyline-crossing.js';
+import type { StripSegment } from '../types.js';
+import type { NightState } from '../vocabulary.js';
+import { type Disappearance, disappearancesAround } from './disappearances.js';
+import type { ExpectedCrossing } from './expected-crossing.js';
+import { darkCulminations } from './night-crossings.js';
+import type { MarkerAtPlace } from './place-year.js';
+
+/** The nights in which a rising (or a setting) is seen; both ends belong to it. */
+interface SeenNights {
+  from: number;
+  to: number;
+}
+
+/** One disappearance in nights: the settings before it, the risings after it, and the gap between them. */
+interface Cycle {
+  settings: SeenNights | null;
+  risings: SeenNights | null;
+  hidden: SeenNights | null;
+}
+
+/**
+ * The nights of an arc from its two dates. Where one date is missing, the crossing is seen on the other side of the
+ * arc's deepest point only; where both are, not at all.
+ */
+function seenNights(
+  marker: MarkerAtPlace,
+  crossing: SkylineCrossing,
+  firstMorning: ExpectedCrossing,
+  lastEvening: ExpectedCrossing,
+): SeenNights | null {
+  if (firstMorning.jdUt === null && lastEvening.jdUt === null) return null;
+  const deepest = crossingAtDeepest(marker.year, crossing, firstMorning.highestRad);
+  return {
+    from: marker.clock.nightOf(firstMorning.jdUt ?? deepest),
+    to: marker.clock.nightOf(lastEvening.jdUt ?? deepest),
+  };
+}
+
+function cycleOf(
+  marker: MarkerAtPlace,
+  crossings: { rising: SkylineCrossing; setting: SkylineCrossing },
+  { lastSettings, nextRisings }: Disappearance,
+): Cycle {
+  const evening = lastSettings.lastEvening.jdUt;
+  const morning = nextRisings.firstMorning.jdUt;
+  return {
+    settings: seenNights(marker, crossings.setting, lastSettings.firstMorning, lastSettings.lastEvening),
+    risings: seenNights(marker, crossings.rising, nextRisings.firstMorning, nextRisings.lastEvening),
+    hidden:
+      evening === null || morning === null
+        ? null
+        : { from: marker.clock.nightOf(evening) + 1, to: marker.clock.nightOf(morning) - 1 },
+  };
+}
+
+function holds(nights: SeenNights | null | undefined, night: number): boolean {
+  return nights !== null && nights !== undefined && night >= nights.from && night <= nights.to;
+}
+
+function stateOf(night: number, cycles: readonly Cycle[], culminatesInDark: boolean): NightState {
+  if (cycles.some((cycle) => holds(cycle.hidden, night))) return 'hidden';
+  if (cycles.some((cycle) => holds(cycle.settings, night) && holds(cycle.risings, night)))
+    return 'dusk-and-dawn';
+  const rises = cycles.some((cycle) => holds(cycle.risings, night));
+  const sets = cycles.some((cycle) => holds(cycle.settings, night));
+  if (rises && sets) return 'rises-and-sets-in-night';
+  if (rises) return 'before-dawn';
+  if (sets) return 'after-dusk';
+  // Between the last evening rising and the first morning setting the star is up all night, unless the night is
+  // too light even for a star high in the sky.
+  return culminatesInDark ? 'all-night' : 'hidden';
+}
+
+/** The states of all nights of the prepared civil year, joined into runs. */
+export function yearStripOf(marker: MarkerAtPlace): StripSegment[] {
+  const { firstDay, lastDay } = marker.year.civil;
+  const { outcome, crossings } = marker.star;
+  if (!crossings) {
+    return [
+      {
+        state: outcome === 'never-sets' ? 'all-night' : 'hidden',
+        fromDayNumber: firstDay,
+        toDayNumber: lastDay,
+      },
+    ];
+  }
+  const cycles = disappearancesAround(marker).map((one) => cycleOf(marker, crossings, one));
+  const dark = darkCulminations(marker, firstDay, lastDay);
+  const segments: StripSegment[] = [];
+  for (let night = firstDay; night <= lastDay; night += 1) {
+    const state = stateOf(night, cycles, dark[night - firstDay] === 1);
+    const last = segments.at(-1);
+    if (last?.state === state) last.toDayNumber = night;
+    else segments.push({ state, fromDayNumber: night, toDayNumber: night });
+  }
+  return segments;
+}
