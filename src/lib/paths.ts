@@ -3,7 +3,6 @@ export const PATTERNS = {
   today: '/',
   signIn: '/sign-in',
   welcome: '/welcome',
-  setup: '/set-up',
   account: '/account',
   stars: '/stars',
   star: '/stars/:markerKey',
@@ -28,7 +27,9 @@ type VersionNumber = number | 'draft';
 export const paths = {
   today: () => PATTERNS.today,
   signIn: (next?: string) => withQuery(PATTERNS.signIn, { next }),
-  welcome: (code?: string) => withQuery(PATTERNS.welcome, { code }),
+  /** The code travels behind the hash: it never reaches a server's log. */
+  welcome: (code?: string) =>
+    code === undefined ? PATTERNS.welcome : `${PATTERNS.welcome}#code=${encodeURIComponent(code)}`,
   account: () => PATTERNS.account,
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
   star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>

@@ -1,5 +1,5 @@
 import { ArrowLeft } from 'lucide-react';
-import { useEffect, useRef, type ReactNode } from 'react';
+import { createContext, useContext, useEffect, useRef, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { IconLink } from './button.js';
 import { classNames } from './class-names.js';
@@ -23,16 +23,23 @@ export interface MastProps {
   children?: ReactNode;
 }
 
+/** What the shell puts at the end of every top screen's mast on a phone: the way to the account. */
+export const MastEnd = createContext<ReactNode>(null);
+
+/** The first screen after loading is read from its start anyway; only a change of screen moves the focus. */
+let firstScreenIsOpen = false;
+
 /** Head of a screen. Its heading takes the focus when the screen opens, so that it is read first. */
 export function Mast({ title, under, backTo, children }: MastProps) {
   const { t } = useTranslation('common');
   const heading = useRef<HTMLHeadingElement>(null);
+  const mastEnd = useContext(MastEnd);
   useEffect(() => {
-    // Only when nothing on the new screen holds the focus: never pull a person out of a field.
-    const active = document.activeElement;
-    if (active === null || active === document.body || !active.isConnected) {
-      heading.current?.focus({ preventScroll: true });
-    }
+    const isFirst = !firstScreenIsOpen;
+    firstScreenIsOpen = true;
+    // Never pull a person out of a field of the new screen.
+    const holdsFocus = document.activeElement?.closest('main') != null;
+    if (!isFirst && !holdsFocus) heading.current?.focus({ preventScroll: true });
   }, []);
   return (
     <div className="mast">
@@ -50,6 +57,7 @@ export function Mast({ title, under, backTo, children }: MastProps) {
         {under !== undefined && <div className="mast-under">{under}</div>}
       </div>
       {children}
+      {backTo === undefined && mastEnd}
     </div>
   );
 }

@@ -125,6 +125,7 @@ export const texts = {
     loadTitle: 'This page could not be brought up',
     safe: 'What you typed is safe on this device.',
     offline: 'There is no network just now. Try again when it is back.',
+    reference: 'Tell the steward this number if it happens again: {{id}}',
     reload: 'Load the page again',
     newVersion: 'Dawnpeg was brought up to date while this page was open. Load it again to go on.',
   },

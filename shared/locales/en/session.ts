@@ -1,5 +1,10 @@
 /** English texts for signing in, codes, passwords and the account page. */
 export const texts = {
+  passwordHint_one: 'At least {{count}} letter or sign. A few words in a row are easy to keep in mind.',
+  passwordHint_other: 'At least {{count}} letters or signs. A few words in a row are easy to keep in mind.',
+  showPassword: 'Show the password',
+  hidePassword: 'Hide the password',
+  switched: 'You are in {{village}} now.',
   signIn: {
     title: 'Sign in',
     email: 'E-mail address',
@@ -9,17 +14,9 @@ export const texts = {
     submit: 'Sign in',
     haveCode: 'I have a code',
     haveCodeHint: 'A steward gave you a code of letters and numbers: start here.',
-    wrong: 'This address and this password do not go together. Look at both and try once more.',
-    tooMany_one: 'Too many tries in a short time. Wait {{count}} minute, then try again.',
-    tooMany_other: 'Too many tries in a short time. Wait {{count}} minutes, then try again.',
     signedOut: 'You are signed out.',
     needed: 'Sign in to go on. You come back to the page you wanted.',
     forgotten: 'Forgotten? The steward of your village can give you a new code.',
-  },
-  demo: {
-    title: 'Try it with an invented village',
-    hint: 'Every account here uses the password {{password}}.',
-    use: 'Fill in {{who}}',
   },
   welcome: {
     title: 'Start with your code',
@@ -27,10 +24,7 @@ export const texts = {
     code: 'Your code',
     codeHint: 'Capital or small letters are the same; lines between the groups may be left out.',
     newPassword: 'Choose a password',
-    passwordHint_one: 'At least {{count}} letter. A few words in a row are easy to keep in mind.',
-    passwordHint_other: 'At least {{count}} letters. A few words in a row are easy to keep in mind.',
     submit: 'Start',
-    badCode: 'This code is not known, was used already, or is too old. Ask the steward for a new one.',
     toSignIn: 'I have a password',
   },
   setup: {
@@ -56,7 +50,6 @@ export const texts = {
     newPassword: 'New password',
     savePassword: 'Change the password',
     passwordChanged: 'Your password is changed. Other devices are signed out.',
-    wrongPassword: 'This is not your password until now. What you typed is still here.',
     screen: 'This device',
   },
 } as const;

@@ -1,0 +1,64 @@
+import { UserRound } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import { Navigate, Outlet, useLocation, useMatches } from 'react-router-dom';
+import { CurrentCommunityProvider, useCommunityChoice } from '#src/lib/community.js';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { useSession } from '#src/lib/session.js';
+import { IconLink } from '#src/ui/button.js';
+import { Mast, MastEnd, Page } from '#src/ui/page.js';
+import { Board } from '#src/ui/surfaces.js';
+import { EmptyState } from '#src/ui/waiting.js';
+import type { RouteHandle } from '../router.js';
+import { Frame } from './frame.js';
+import { Rail } from './rail.js';
+
+/** Asks a visitor to sign in first; brings everybody else to their screen, inside the rail. */
+export function SignedInLayout() {
+  const { person } = useSession();
+  const location = useLocation();
+  const matches = useMatches();
+  const { t } = useTranslation('common');
+  if (person === null) {
+    return <Navigate to={paths.signIn(location.pathname + location.search)} replace />;
+  }
+  const hasRail = matches.every(({ handle }) => (handle as RouteHandle | undefined)?.rail !== false);
+  return (
+    <CurrentCommunityProvider>
+      <MastEnd
+        value={
+          <span className="phone-only">
+            <IconLink
+              to={paths.account()}
+              label={t('rail.account')}
+              icon={<UserRound aria-hidden size={24} />}
+            />
+          </span>
+        }
+      >
+        <Frame rail={hasRail ? <Rail /> : null}>
+          <Outlet />
+        </Frame>
+      </MastEnd>
+    </CurrentCommunityProvider>
+  );
+}
+
+/** Everything of a village needs one. */
+export function NeedsVillage() {
+  const { community } = useCommunityChoice();
+  return community === null ? <NoVillagePage /> : <Outlet key={community.communityId} />;
+}
+
+function NoVillagePage() {
+  const { t } = useTranslation('common');
+  usePageTitle(t('village.none'));
+  return (
+    <Page>
+      <Mast title={t('productName')} />
+      <Board>
+        <EmptyState title={t('village.none')}>{t('village.noneHint')}</EmptyState>
+      </Board>
+    </Page>
+  );
+}

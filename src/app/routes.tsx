@@ -1,0 +1,27 @@
+import type { ComponentType } from 'react';
+import type { Namespace } from '#shared/locales/index.js';
+import { PATTERNS } from '#src/lib/paths.js';
+
+/** One address of the application. Its code and its texts are fetched together, when it is first opened. */
+export interface AppRoute {
+  path: string;
+  /** Text files the screen reads besides `common` and `problems`. */
+  texts: readonly Namespace[];
+  load: () => Promise<{ Component: ComponentType }>;
+  /** False for a screen that needs the whole height: no rail. */
+  rail?: boolean;
+}
+
+/** Screens before the door: anybody may open them. */
+export const doorRoutes: readonly AppRoute[] = [
+  { path: PATTERNS.signIn, texts: ['session'], load: () => import('./routes/sign-in.js') },
+  { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
+];
+
+/** Screens that work for a signed-in person without any village. */
+export const personRoutes: readonly AppRoute[] = [
+  { path: PATTERNS.account, texts: ['session'], load: () => import('./routes/account.js') },
+];
+
+/** Screens of the village on screen. A feature adds one line for each of its screens. */
+export const villageRoutes: readonly AppRoute[] = [];

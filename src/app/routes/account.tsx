@@ -1,0 +1,1 @@
+export { AccountPage as Component } from '#src/features/session/components/account-page.js';

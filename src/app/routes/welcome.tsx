@@ -1,0 +1,1 @@
+export { WelcomePage as Component } from '#src/features/session/components/welcome-page.js';

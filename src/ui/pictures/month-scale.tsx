@@ -1,0 +1,61 @@
+import { classNames } from '../class-names.js';
+import { percent, startPercent, stretch, type DaySpan } from './day-span.js';
+
+/** A month of the scale. `lib/date-words` makes them: `months(year)`. */
+export interface ScaleMonth {
+  dayNumber: number;
+  days: number;
+  short: string;
+  narrow: string;
+}
+
+/** Names of the months under or over a lane. One letter each where there is little room. */
+export function MonthScale({
+  span,
+  months,
+  narrow = false,
+}: {
+  span: DaySpan;
+  months: readonly ScaleMonth[];
+  narrow?: boolean | undefined;
+}) {
+  return (
+    <div className={classNames('picture month-scale', narrow && 'short')} aria-hidden>
+      {months.map((month) => {
+        const place = stretch(month.dayNumber, month.dayNumber + month.days - 1, span);
+        if (place === null) return null;
+        return (
+          <span key={month.dayNumber} style={{ left: percent(place.start), width: percent(place.width) }}>
+            {narrow ? month.narrow : month.short}
+          </span>
+        );
+      })}
+    </div>
+  );
+}
+
+/** Thin lines at the beginnings of months, through lanes and bars. Lay it under them in a `relative` box. */
+export function MonthLines({ span, months }: { span: DaySpan; months: readonly ScaleMonth[] }) {
+  return (
+    <svg
+      className="picture"
+      style={{ position: 'absolute', inset: 0 }}
+      width="100%"
+      height="100%"
+      aria-hidden
+    >
+      {months.map(
+        (month) =>
+          month.dayNumber > span.first && (
+            <rect
+              key={month.dayNumber}
+              className="pic-month-line"
+              x={percent(startPercent(month.dayNumber, span))}
+              width={1.5}
+              height="100%"
+            />
+          ),
+      )}
+    </svg>
+  );
+}
