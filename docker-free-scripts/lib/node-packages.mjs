@@ -33,10 +33,11 @@ function installedAsLocked() {
   );
 }
 
-/** @typedef {{ packages: Record<string, { version?: string, optional?: boolean }> }} LockFile */
+/** @typedef {{ version?: string, optional?: boolean }} LockedPackage */
 
-/** @param {string} file */
+/** @param {string} file @returns {Record<string, LockedPackage>} */
 function packagesIn(file) {
-  const lock = /** @type {LockFile} */ (/** @type {unknown} */ (JSON.parse(readFileSync(file, 'utf8'))));
-  return lock.packages;
+  /** @type {unknown} */
+  const lock = JSON.parse(readFileSync(file, 'utf8'));
+  return /** @type {{ packages: Record<string, LockedPackage> }} */ (lock).packages;
 }

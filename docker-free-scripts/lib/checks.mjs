@@ -1,0 +1,66 @@
+import os from 'node:os';
+import { tool } from './build.mjs';
+
+/**
+ * @typedef {object} Check
+ * @property {string} name what it holds the tree against
+ * @property {() => Promise<{ code: number, output: string }>} run
+ */
+
+/** Folders with a tsconfig of their own. */
+const typedFolders = ['shared', 'server', 'src', 'docker-free-scripts', 'tests'];
+
+/** One entry each in the final count. @type {Check[]} */
+const checks = [
+  { name: 'lint', run: () => tool('eslint', ['.']) },
+  { name: 'types', run: allTypes },
+  { name: 'format', run: () => tool('prettier', ['--check', '--log-level', 'warn', '.']) },
+  {
+    name: 'import rules',
+    run: () =>
+      tool('depcruise', [
+        '--config',
+        '.dependency-cruiser.mjs',
+        'server',
+        'shared',
+        'src',
+        'tests',
+        'docker-free-scripts',
+      ]),
+  },
+  { name: 'unused code', run: () => tool('knip', ['--no-progress', '--no-config-hints']) },
+];
+
+async function allTypes() {
+  let output = '';
+  let code = 0;
+  for (const folder of typedFolders) {
+    // The notes of the last run make the next one quick; they change nothing in what is found.
+    const notes = `.tmp/types-${folder}.tsbuildinfo`;
+    const done = await tool('tsc', ['-p', folder, '--noEmit', '--incremental', '--tsBuildInfoFile', notes]);
+    output += done.output;
+    code ||= done.code;
+  }
+  return { code, output };
+}
+
+/**
+ * Runs all checks, as many at once as there are processors (two at most: the compiler needs memory).
+ *
+ * @param {(name: string, passed: boolean, seconds: number, output: string) => void} report
+ * @returns {Promise<{ passed: number, failed: number }>}
+ */
+export async function runChecks(report) {
+  const waiting = [...checks];
+  let passed = 0;
+  const worker = async () => {
+    for (let check = waiting.shift(); check; check = waiting.shift()) {
+      const begin = performance.now();
+      const { code, output } = await check.run();
+      if (code === 0) passed += 1;
+      report(check.name, code === 0, (performance.now() - begin) / 1000, output.trim());
+    }
+  };
+  await Promise.all(Array.from({ length: Math.min(2, os.availableParallelism()) }, worker));
+  return { passed, failed: checks.length - passed };
+}
