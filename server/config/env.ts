@@ -101,6 +101,9 @@ const variables = z.object({
     .optional(),
 });
 
+/** Every variable there is, for `.env.example` to be held against. */
+export const VARIABLE_NAMES: readonly string[] = Object.keys(variables.shape);
+
 /** Reads the settings of this process; throws a ConfigError for the first value that cannot be used. */
 export function readConfig(): Config {
   return parseConfig(process.env);
