@@ -138,7 +138,11 @@ export function expectedDates(
 export function depthAtCrossingYear(question: DepthAtCrossingCase): DepthAtCrossingYear {
   assertQuestion(question);
   const marker = resolveMarker(markerKeyOf(question.hr));
-  if (!marker) throw new SkyRangeError('hr', `Give an HR number of the star table; ${JSON.stringify(question.hr) ?? 'nothing'} is not in it.`);
+  if (!marker)
+    throw new SkyRangeError(
+      'hr',
+      `Give an HR number of the star table; ${JSON.stringify(question.hr) ?? 'nothing'} is not in it.`,
+    );
   return depthAtCrossingOf(preparedYearOf(question.year), marker, question);
 }
 

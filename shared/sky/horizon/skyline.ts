@@ -6,8 +6,8 @@ export interface Skyline {
   level: boolean;
   lowestRad: number;
   highestRad: number;
-  /** Azimuths of the table's points, ascending in [0, 2π). */
-  azimuthsRad: readonly number[];
+  /** Directions of the table's points, ascending in azimuth; none on a level skyline. */
+  points: readonly { sinAzimuth: number; cosAzimuth: number }[];
   altitudeRad(azimuthRad: number): number;
 }
 
@@ -17,7 +17,7 @@ export function levelSkyline(altitudeRad: number): Skyline {
     level: true,
     lowestRad: altitudeRad,
     highestRad: altitudeRad,
-    azimuthsRad: [],
+    points: [],
     altitudeRad: () => altitudeRad,
   };
 }
@@ -43,7 +43,7 @@ export function prepareSkyline(points: readonly SkylinePoint[]): Skyline {
     level: false,
     lowestRad,
     highestRad,
-    azimuthsRad: azimuths,
+    points: azimuths.map((azimuth) => ({ sinAzimuth: Math.sin(azimuth), cosAzimuth: Math.cos(azimuth) })),
     altitudeRad(azimuthRad) {
       const azimuth = wrapTau(azimuthRad);
       // First point beyond the azimuth, by halving.

@@ -1,11 +1,11 @@
-import { arcEndRad, crossingAtArcEnd, type NeededSine } from '../phenomena/dark-arc.js';
+import { arcEndRad, crossingAtArcEnd, type NeededDepth } from '../phenomena/dark-arc.js';
 import type { HorizonSide, PhenomenonFacts } from '../phenomena/phenomenon-facts.js';
 import type { SkylineCrossing } from '../phenomena/skyline-crossing.js';
 import { monthOfDay } from '../time/civil-year.js';
 import { TAU } from '../units/angle.js';
 import type { Clarity } from '../vocabulary.js';
 import { CLARITY_SHIFT_DEG, clarityOfMonth } from '../visibility/clarity.js';
-import { neededSineAt } from '../visibility/needed-sine.js';
+import { neededAtCrossing } from '../visibility/needed-at-crossing.js';
 import type { MarkerAtPlace } from './place-year.js';
 
 /** The expected crossing of one phenomenon in one turn of the Sun. */
@@ -18,13 +18,8 @@ export interface ExpectedCrossing {
   clarity: Clarity;
   /** Place's shift and clarity together. */
   shiftDeg: number;
-  needed: NeededSine;
+  needed: NeededDepth;
 }
-
-/** Days by which a month's clarity may carry an event away from the day computed without it. */
-const CLARITY_REACH_DAYS = 60;
-/** Half a crossing to either side, the offset of the widest time zone, and a day of grace. */
-const EDGE_DAYS = 3;
 
 export function placeShiftDeg(marker: MarkerAtPlace, side: HorizonSide): number {
   return side === 'same' ? marker.settings.sameSideShiftDeg : marker.settings.oppositeSideShiftDeg;
@@ -35,18 +30,18 @@ export function neededIn(
   crossing: SkylineCrossing,
   side: HorizonSide,
   shiftDeg: number,
-): NeededSine {
+): NeededDepth {
   const { year, ground, settings, threshold } = marker;
-  return neededSineAt(year, ground, crossing, settings.skylineRule, side, threshold, shiftDeg);
+  return neededAtCrossing(year, ground, crossing, settings.skylineRule, side, threshold, shiftDeg);
 }
 
-/** JD UT of a phenomenon in one turn with a given shift, or null. */
-export function crossingWithShift(
+/** JD UT of a phenomenon in one turn with a given need, or null. */
+export function crossingWithNeed(
   marker: MarkerAtPlace,
   crossing: SkylineCrossing,
   facts: PhenomenonFacts,
   highestRad: number,
-  needed: NeededSine,
+  needed: NeededDepth,
 ): number | null {
   const longitude = arcEndRad(crossing, highestRad, needed, facts.end);
   return longitude === null ? null : crossingAtArcEnd(marker.year, crossing, longitude, needed, facts.end);
@@ -59,19 +54,38 @@ export function expectedInTurn(
   facts: PhenomenonFacts,
   highestRad: number,
 ): ExpectedCrossing {
-  const baseShiftDeg = placeShiftDeg(marker, facts.side);
-  const baseNeeded = neededIn(marker, crossing, facts.side, baseShiftDeg);
-  const base = crossingWithShift(marker, crossing, facts, highestRad, baseNeeded);
-  const expected = { crossing, highestRad, jdUt: base, shiftDeg: baseShiftDeg, needed: baseNeeded };
-  if (base === null) return { ...expected, clarity: 'ordinary' };
+  const needed = neededIn(marker, crossing, facts.side, placeShiftDeg(marker, facts.side));
+  const longitudeRad = arcEndRad(crossing, highestRad, needed, facts.end);
+  return expectedAtArcEnd(marker, crossing, facts, highestRad, needed, longitudeRad);
+}
 
-  const month = monthOfDay(marker.clock.dayOf(base), marker.year.civil.calendar);
+/** @param longitudeRad end of the arc without clarity, or null */
+function expectedAtArcEnd(
+  marker: MarkerAtPlace,
+  crossing: SkylineCrossing,
+  facts: PhenomenonFacts,
+  highestRad: number,
+  needed: NeededDepth,
+  longitudeRad: number | null,
+): ExpectedCrossing {
+  const jdUt =
+    longitudeRad === null ? null : crossingAtArcEnd(marker.year, crossing, longitudeRad, needed, facts.end);
+  const shiftDeg = placeShiftDeg(marker, facts.side);
+  if (jdUt === null) return { crossing, highestRad, jdUt, clarity: 'ordinary', shiftDeg, needed };
+
+  const month = monthOfDay(marker.clock.dayOf(jdUt), marker.year.civil.calendar);
   const clarity = clarityOfMonth(marker.settings.clarityByMonth, month);
-  if (clarity === 'ordinary') return { ...expected, clarity };
-  const shiftDeg = baseShiftDeg + CLARITY_SHIFT_DEG[clarity];
-  const needed = neededIn(marker, crossing, facts.side, shiftDeg);
-  const jdUt = crossingWithShift(marker, crossing, facts, highestRad, needed);
-  return { ...expected, jdUt, clarity, shiftDeg, needed };
+  if (clarity === 'ordinary') return { crossing, highestRad, jdUt, clarity, shiftDeg, needed };
+  const shiftInAirDeg = shiftDeg + CLARITY_SHIFT_DEG[clarity];
+  const neededInAir = neededIn(marker, crossing, facts.side, shiftInAirDeg);
+  return {
+    crossing,
+    highestRad,
+    jdUt: crossingWithNeed(marker, crossing, facts, highestRad, neededInAir),
+    clarity,
+    shiftDeg: shiftInAirDeg,
+    needed: neededInAir,
+  };
 }
 
 /**
@@ -83,22 +97,20 @@ export function expectedAroundYear(
   crossing: SkylineCrossing,
   facts: PhenomenonFacts,
 ): ExpectedCrossing[] {
-  const { year, settings } = marker;
-  const { firstDay, lastDay } = year.civil;
-  const steady = settings.clarityByMonth.every((clarity) => clarity === 'ordinary');
-  const reachDays = steady ? EDGE_DAYS : CLARITY_REACH_DAYS;
-  const from = year.sun.longitudeRad(firstDay - reachDays);
-  const to = year.sun.longitudeRad(lastDay + reachDays);
-  const baseNeeded = neededIn(marker, crossing, facts.side, placeShiftDeg(marker, facts.side));
-  const firstTurn = Math.floor((from - crossing.highestRad) / TAU);
-  const lastTurn = Math.floor((to - crossing.highestRad) / TAU);
+  const { fromRad, toRad } = marker.window;
+  const needed = neededIn(marker, crossing, facts.side, placeShiftDeg(marker, facts.side));
+  const firstTurn = Math.floor((fromRad - crossing.highestRad) / TAU);
+  const lastTurn = Math.floor((toRad - crossing.highestRad) / TAU);
 
   const found: ExpectedCrossing[] = [];
   for (let turn = firstTurn; turn <= lastTurn; turn += 1) {
     const highestRad = crossing.highestRad + turn * TAU;
+    const longitudeRad = arcEndRad(crossing, highestRad, needed, facts.end);
     // Without an arc the middle of it stands for the place in the year where the phenomenon would be looked for.
-    const longitude = arcEndRad(crossing, highestRad, baseNeeded, facts.end) ?? highestRad + Math.PI;
-    if (longitude >= from && longitude <= to) found.push(expectedInTurn(marker, crossing, facts, highestRad));
+    const aboutRad = longitudeRad ?? highestRad + Math.PI;
+    if (aboutRad >= fromRad && aboutRad <= toRad) {
+      found.push(expectedAtArcEnd(marker, crossing, facts, highestRad, needed, longitudeRad));
+    }
   }
   return found;
 }

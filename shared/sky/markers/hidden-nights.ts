@@ -1,6 +1,9 @@
 import { sinDeepestSun } from '../phenomena/deepest-sun.js';
-import type { SkyNote } from '../vocabulary.js';
-import { type Disappearance, disappearancesAround } from './disappearances.js';
+import type { SkylineCrossing } from '../phenomena/skyline-crossing.js';
+import type { Phenomenon, SkyNote } from '../vocabulary.js';
+import { RAD_PER_DEG } from '../units/angle.js';
+import { CLARITY_SHIFT_DEG } from '../visibility/clarity.js';
+import { Disappearances } from './disappearances.js';
 import { nightsWithoutDarkMoment, sameSideNeeded } from './night-crossings.js';
 import type { MarkerAtPlace } from './place-year.js';
 
@@ -13,39 +16,53 @@ export interface HiddenNights {
 /** A pair further apart than this is not one disappearance: the star is hidden all year. */
 const LONGEST_PAIR_DAYS = 364;
 
-/** First and last hidden night of a disappearance by its two dates, or null where one of them is missing. */
+/** First and last hidden night by the dates of the year's disappearance, or null where one of them is missing. */
 function hiddenSpan(
   marker: MarkerAtPlace,
-  disappearance: Disappearance,
+  disappearances: Disappearances,
 ): { from: number; to: number } | null {
-  const evening = disappearance.lastSettings.lastEvening.jdUt;
-  const morning = disappearance.nextRisings.firstMorning.jdUt;
+  const index =
+    indexInYear(marker, disappearances, 'heliacal-rising') ??
+    indexInYear(marker, disappearances, 'heliacal-setting');
+  if (index === null) return null;
+  const evening = disappearances.expected(index, 'heliacal-setting').jdUt;
+  const morning = disappearances.expected(index, 'heliacal-rising').jdUt;
   if (evening === null || morning === null || morning - evening > LONGEST_PAIR_DAYS) return null;
   // The evening's own night and the night that ends with the morning are both seen.
   return { from: marker.clock.dayOf(evening) + 1, to: marker.clock.dayOf(morning) - 2 };
 }
 
-/** The disappearance that the year is about: the first one that ends in it, else the first one that begins in it. */
-function disappearanceOfYear(marker: MarkerAtPlace): Disappearance | null {
+/** The first disappearance with this phenomenon in the civil year. */
+function indexInYear(
+  marker: MarkerAtPlace,
+  disappearances: Disappearances,
+  phenomenon: Phenomenon,
+): number | null {
   const { firstDay, lastDay } = marker.year.civil;
-  const inYear = (jdUt: number | null): boolean => {
-    if (jdUt === null) return false;
-    const day = marker.clock.dayOf(jdUt);
-    return day >= firstDay && day <= lastDay;
-  };
-  const all = disappearancesAround(marker);
-  return (
-    all.find((one) => inYear(one.nextRisings.firstMorning.jdUt)) ??
-    all.find((one) => inYear(one.lastSettings.lastEvening.jdUt)) ??
-    null
-  );
+  for (let index = disappearances.first; index <= disappearances.last; index += 1) {
+    const { jdUt } = disappearances.expected(index, phenomenon);
+    const day = jdUt === null ? Number.NaN : marker.clock.dayOf(jdUt);
+    if (day >= firstDay && day <= lastDay) return index;
+  }
+  return null;
+}
+
+/** True where even the lightest night of the year is dark enough in hazy air: most places, most stars. */
+function hasNoLightNights({ year, ground, threshold, settings }: MarkerAtPlace): boolean {
+  const lightestSine =
+    ground.latitude.cos * year.cosObliquity - Math.abs(ground.latitude.sin) * year.sinObliquity;
+  const mostDeg = threshold.sameSideDeg + settings.sameSideShiftDeg + CLARITY_SHIFT_DEG.hazy;
+  return lightestSine >= Math.sin(Math.min(90, mostDeg) * RAD_PER_DEG);
 }
 
 /** True when on more than half of the nights the Sun never sinks to the depth that the crossings ask for. */
-function mostlyLight(marker: MarkerAtPlace, nights: readonly number[]): boolean {
-  const crossings = marker.star.crossings;
-  if (!crossings || nights.length === 0) return false;
-  const neededAt = [crossings.rising, crossings.setting].map((crossing) => ({
+function mostlyLight(
+  marker: MarkerAtPlace,
+  crossings: readonly SkylineCrossing[],
+  nights: readonly number[],
+): boolean {
+  if (nights.length === 0 || hasNoLightNights(marker)) return false;
+  const neededAt = crossings.map((crossing) => ({
     needed: sameSideNeeded(marker, crossing),
     middle: crossing.highestRad + Math.PI,
   }));
@@ -65,14 +82,14 @@ export function hiddenNightsOf(marker: MarkerAtPlace): HiddenNights {
   const crossings = marker.star.crossings;
   if (!crossings) return { nightsHidden: null, notes: [] };
   const { firstDay, lastDay } = marker.year.civil;
-  const disappearance = disappearanceOfYear(marker);
-  const span = disappearance && hiddenSpan(marker, disappearance);
+  const both = [crossings.rising, crossings.setting];
+  const span = hiddenSpan(marker, new Disappearances(marker, crossings));
   const nights =
     span && span.to >= span.from
       ? Array.from({ length: span.to - span.from + 1 }, (_, index) => span.from + index)
-      : nightsWithoutDarkMoment(marker, [crossings.rising, crossings.setting], firstDay, lastDay);
+      : nightsWithoutDarkMoment(marker, both, firstDay, lastDay);
   const notes: SkyNote[] = [];
   if (nights.length === 0) notes.push('never-disappears');
-  if (mostlyLight(marker, nights)) notes.push('lost-in-light-nights');
+  if (mostlyLight(marker, both, nights)) notes.push('lost-in-light-nights');
   return { nightsHidden: nights.length, notes };
 }

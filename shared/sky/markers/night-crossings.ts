@@ -43,7 +43,7 @@ export function sameSideNeeded(
   const shiftDeg = placeShiftDeg(marker, 'same');
   const byClarity = [-1, 0, 1].map((clarityDeg) => neededIn(marker, crossing, 'same', shiftDeg + clarityDeg));
   return (night, sunLongitudeRad) =>
-    byClarity[1 + clarityShiftOfNight(marker, night)]?.(sunLongitudeRad) ?? Number.POSITIVE_INFINITY;
+    byClarity[1 + clarityShiftOfNight(marker, night)]?.sineAt(sunLongitudeRad) ?? Number.POSITIVE_INFINITY;
 }
 
 /**

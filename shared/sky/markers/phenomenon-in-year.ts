@@ -7,7 +7,7 @@ import { clampUnit, DEG_PER_RAD } from '../units/angle.js';
 import { rangeHalfWidthDeg } from '../visibility/range-width.js';
 import type { Phenomenon } from '../vocabulary.js';
 import {
-  crossingWithShift,
+  crossingWithNeed,
   type ExpectedCrossing,
   expectedAroundYear,
   neededIn,
@@ -21,11 +21,14 @@ function describe(marker: MarkerAtPlace, expected: ExpectedCrossing, jdUt: numbe
   const { crossing, needed } = expected;
   const sunLongitude = marker.year.sun.longitudeRad(jdUt);
   const sun = sunAtCrossing(marker.year, marker.ground.latitude, crossing, sunLongitude);
+  const { dayNumber, gregorian, julian } = labelledDay(marker.clock.dayOf(jdUt));
   return {
-    ...labelledDay(marker.clock.dayOf(jdUt)),
+    dayNumber,
+    gregorian,
+    julian,
     jdUt,
     sunDepressionDeg: sun.depressionRad * DEG_PER_RAD,
-    neededDepressionDeg: Math.asin(clampUnit(needed(sunLongitude))) * DEG_PER_RAD,
+    neededDepressionDeg: Math.asin(clampUnit(needed.sineAt(sunLongitude))) * DEG_PER_RAD,
     starAzimuthDeg: crossing.starAzimuthRad * DEG_PER_RAD,
     starAltitudeDeg: crossing.starAltitudeRad * DEG_PER_RAD,
     sunAzimuthDeg: sun.azimuthRad * DEG_PER_RAD,
@@ -40,7 +43,7 @@ function rangeEnd(
   byDeg: number,
 ): Crossing | null {
   const needed = neededIn(marker, expected.crossing, facts.side, expected.shiftDeg + byDeg);
-  const jdUt = crossingWithShift(marker, expected.crossing, facts, expected.highestRad, needed);
+  const jdUt = crossingWithNeed(marker, expected.crossing, facts, expected.highestRad, needed);
   return jdUt === null ? null : describe(marker, { ...expected, needed }, jdUt);
 }
 

@@ -15,11 +15,25 @@ export interface PlaceYear {
   ground: Ground;
   clock: DayClock;
   settings: VisibilitySettings;
+  /** The Sun's longitudes between which a phenomenon may belong to the civil year. */
+  window: { fromRad: number; toRad: number };
 }
 
+/** Days by which a month's clarity may carry an event away from the day computed without it. */
+const CLARITY_REACH_DAYS = 60;
+/** Half a crossing to either side, the offset of the widest time zone, and a day of grace. */
+const EDGE_DAYS = 3;
+
 export function placeYearOf(year: PreparedYear, site: Site, settings: VisibilitySettings): PlaceYear {
+  const { firstDay, lastDay } = year.civil;
+  const steady = settings.clarityByMonth.every((clarity) => clarity === 'ordinary');
+  const reachDays = steady ? EDGE_DAYS : CLARITY_REACH_DAYS;
   return {
     year,
+    window: {
+      fromRad: year.sun.longitudeRad(firstDay - reachDays),
+      toRad: year.sun.longitudeRad(lastDay + reachDays),
+    },
     ground: {
       latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
       longitudeRad: site.longitudeDeg * RAD_PER_DEG,
@@ -40,8 +54,13 @@ export interface MarkerAtPlace extends PlaceYear {
 
 export function markerAtPlace(placeYear: PlaceYear, marker: ResolvedMarker): MarkerAtPlace {
   const starIndex = starIndexOf(marker.hr) ?? 0;
+  // Written out, not spread: this runs once per star of the table.
   return {
-    ...placeYear,
+    year: placeYear.year,
+    ground: placeYear.ground,
+    clock: placeYear.clock,
+    settings: placeYear.settings,
+    window: placeYear.window,
     marker,
     starIndex,
     star: starAtPlace(placeYear.year, placeYear.ground, starIndex),

@@ -2,7 +2,7 @@ import { crossingAtDeepest } from '../phenomena/dark-arc.js';
 import type { SkylineCrossing } from '../phenomena/skyline-crossing.js';
 import type { StripSegment } from '../types.js';
 import type { NightState } from '../vocabulary.js';
-import { type Disappearance, disappearancesAround } from './disappearances.js';
+import { Disappearances } from './disappearances.js';
 import type { ExpectedCrossing } from './expected-crossing.js';
 import { darkCulminations } from './night-crossings.js';
 import type { MarkerAtPlace } from './place-year.js';
@@ -41,17 +41,23 @@ function seenNights(
 function cycleOf(
   marker: MarkerAtPlace,
   crossings: { rising: SkylineCrossing; setting: SkylineCrossing },
-  { lastSettings, nextRisings }: Disappearance,
+  disappearances: Disappearances,
+  index: number,
 ): Cycle {
-  const evening = lastSettings.lastEvening.jdUt;
-  const morning = nextRisings.firstMorning.jdUt;
+  const lastEvening = disappearances.expected(index, 'heliacal-setting');
+  const firstMorning = disappearances.expected(index, 'heliacal-rising');
+  const firstSetting = disappearances.expected(index, 'cosmical-setting');
+  const lastRising = disappearances.expected(index, 'acronychal-rising');
   return {
-    settings: seenNights(marker, crossings.setting, lastSettings.firstMorning, lastSettings.lastEvening),
-    risings: seenNights(marker, crossings.rising, nextRisings.firstMorning, nextRisings.lastEvening),
+    settings: seenNights(marker, crossings.setting, firstSetting, lastEvening),
+    risings: seenNights(marker, crossings.rising, firstMorning, lastRising),
     hidden:
-      evening === null || morning === null
+      lastEvening.jdUt === null || firstMorning.jdUt === null
         ? null
-        : { from: marker.clock.nightOf(evening) + 1, to: marker.clock.nightOf(morning) - 1 },
+        : {
+            from: marker.clock.nightOf(lastEvening.jdUt) + 1,
+            to: marker.clock.nightOf(firstMorning.jdUt) - 1,
+          },
   };
 }
 
@@ -86,7 +92,11 @@ export function yearStripOf(marker: MarkerAtPlace): StripSegment[] {
       },
     ];
   }
-  const cycles = disappearancesAround(marker).map((one) => cycleOf(marker, crossings, one));
+  const disappearances = new Disappearances(marker, crossings);
+  const cycles: Cycle[] = [];
+  for (let index = disappearances.first; index <= disappearances.last; index += 1) {
+    cycles.push(cycleOf(marker, crossings, disappearances, index));
+  }
   const dark = darkCulminations(marker, firstDay, lastDay);
   const segments: StripSegment[] = [];
   for (let night = firstDay; night <= lastDay; night += 1) {

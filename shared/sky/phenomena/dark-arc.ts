@@ -11,14 +11,17 @@ import { sinSunDepth, type SkylineCrossing } from './skyline-crossing.js';
  */
 export type ArcEnd = 'dawn' | 'dusk';
 
-/** Sine of the depth that is needed when the Sun has a given longitude; most rules ignore the longitude. */
-export type NeededSine = (sunLongitudeRad: number) => number;
+/** The depth that is needed at a crossing, as a sine; most rules ignore the Sun's longitude. */
+export interface NeededDepth {
+  sineAt(sunLongitudeRad: number): number;
+}
 
 /** Enough for a threshold that depends on the Sun's azimuth; a constant one is done after the first. */
 const MAX_STEPS = 8;
 const SETTLED = 1e-9;
 /** The closed form and the crossings agree within one crossing; a varying threshold may ask for more. */
 const MAX_WALK = 4;
+const OTHER_TRIES = [-1, 1, 2, 3, 4] as const;
 
 /**
  * Half the stretch of longitude in which the Sun is too high at a crossing, or null where it is never deep enough.
@@ -37,19 +40,30 @@ export function tooHighHalfArcRad(reach: number, sinDepth: number): number | nul
 export function arcEndRad(
   crossing: EclipticZenith,
   highestUnwrappedRad: number,
-  needed: NeededSine,
+  needed: NeededDepth,
   end: ArcEnd,
 ): number | null {
   let longitude = highestUnwrappedRad + Math.PI;
-  let sine = needed(longitude);
+  let sine = needed.sineAt(longitude);
   for (let step = 0; step < MAX_STEPS; step += 1) {
     const half = tooHighHalfArcRad(crossing.reach, sine);
     longitude = highestUnwrappedRad + (half === null ? Math.PI : end === 'dawn' ? half : TAU - half);
-    const next = needed(longitude);
+    const next = needed.sineAt(longitude);
     if (Math.abs(next - sine) < SETTLED) return half === null ? null : longitude;
     sine = next;
   }
   return tooHighHalfArcRad(crossing.reach, sine) === null ? null : longitude;
+}
+
+/** Is the Sun deep enough at one return of the crossing, counted in sidereal days from its known instant? */
+function darkEnough(
+  year: PreparedYear,
+  crossing: SkylineCrossing,
+  turn: number,
+  needed: NeededDepth,
+): boolean {
+  const sunLongitude = year.sun.longitudeRad(crossing.anInstantJdUt + turn * year.sidereal.periodDays);
+  return sinSunDepth(crossing, sunLongitude) >= needed.sineAt(sunLongitude);
 }
 
 /**
@@ -61,7 +75,7 @@ export function crossingAtArcEnd(
   year: PreparedYear,
   crossing: SkylineCrossing,
   longitudeRad: number,
-  needed: NeededSine,
+  needed: NeededDepth,
   end: ArcEnd,
 ): number | null {
   const { periodDays } = year.sidereal;
@@ -69,17 +83,14 @@ export function crossingAtArcEnd(
   const inward = end === 'dawn' ? 1 : -1;
   let turn = end === 'dawn' ? Math.ceil(turns) : Math.floor(turns);
 
-  const darkEnough = (candidate: number): boolean => {
-    const sunLongitude = year.sun.longitudeRad(crossing.anInstantJdUt + candidate * periodDays);
-    return sinSunDepth(crossing, sunLongitude) >= needed(sunLongitude);
-  };
-  if (darkEnough(turn)) {
-    for (let step = 0; step < MAX_WALK && darkEnough(turn - inward); step += 1) turn -= inward;
+  if (darkEnough(year, crossing, turn, needed)) {
+    for (let step = 0; step < MAX_WALK && darkEnough(year, crossing, turn - inward, needed); step += 1)
+      turn -= inward;
     return crossing.anInstantJdUt + turn * periodDays;
   }
-  for (const step of [-1, 1, 2, 3, MAX_WALK]) {
+  for (const step of OTHER_TRIES) {
     const candidate = turn + step * inward;
-    if (darkEnough(candidate)) return crossing.anInstantJdUt + candidate * periodDays;
+    if (darkEnough(year, crossing, candidate, needed)) return crossing.anInstantJdUt + candidate * periodDays;
   }
   return null;
 }
@@ -93,22 +104,4 @@ export function crossingAtDeepest(
   const middle = year.sun.instantOf(highestUnwrappedRad + Math.PI);
   const turn = Math.round((middle - crossing.anInstantJdUt) / year.sidereal.periodDays);
   return crossing.anInstantJdUt + turn * year.sidereal.periodDays;
-}
-
-/**
- * The turns of the Sun whose arcs may have an end in a stretch of time: values for `highestUnwrappedRad`, ascending.
- */
-export function turnsAround(
-  year: PreparedYear,
-  crossing: SkylineCrossing,
-  fromJdUt: number,
-  toJdUt: number,
-): number[] {
-  const from = year.sun.longitudeRad(fromJdUt);
-  const to = year.sun.longitudeRad(toJdUt);
-  const first = Math.floor((from - crossing.highestRad) / TAU);
-  const last = Math.floor((to - crossing.highestRad) / TAU);
-  const turns: number[] = [];
-  for (let turn = first; turn <= last; turn += 1) turns.push(crossing.highestRad + turn * TAU);
-  return turns;
 }

@@ -1,6 +1,6 @@
 import type { CivilDay } from '../types.js';
 import { gregorianOf, julianOf } from './julian-day.js';
-import { zoneOffsetDays } from './zone-offset.js';
+import { zoneOffsetsOf } from './zone-offset.js';
 
 /** 1900-01-01 0h UT. Before it places had no zones worth the name, and local mean solar time counts. */
 const FIRST_ZONED_JD_UT = 2_415_020.5;
@@ -21,10 +21,9 @@ export interface DayClock {
  */
 export function dayClockOf(timeZone: string | null, longitudeDeg: number): DayClock {
   const meanSolarDays = longitudeDeg / 360;
-  const offsetDays =
-    timeZone === null
-      ? () => meanSolarDays
-      : (jdUt: number) => (jdUt < FIRST_ZONED_JD_UT ? meanSolarDays : zoneOffsetDays(timeZone, jdUt));
+  const zone = timeZone === null ? null : zoneOffsetsOf(timeZone);
+  const offsetDays = (jdUt: number): number =>
+    zone === null || jdUt < FIRST_ZONED_JD_UT ? meanSolarDays : zone.offsetDays(jdUt);
   return {
     offsetDays,
     dayOf: (jdUt) => Math.floor(jdUt + offsetDays(jdUt) + 0.5),

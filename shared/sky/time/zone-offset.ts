@@ -13,6 +13,8 @@ const MS_AT_J2000 = 946_728_000_000;
 /** Shorter than any pair of changes on record (a suspension of summer time lasts weeks). */
 const PROBE_STEP_DAYS = 6;
 const MINUTE_DAYS = 1 / 1440;
+/** Changes are looked up in spans of this length. */
+const SPAN_DAYS = 366;
 
 interface ZoneYear {
   /** Instants (JD UT) at which a new offset begins, ascending; the first one opens the year. */
@@ -21,9 +23,6 @@ interface ZoneYear {
 }
 
 const formatters = new Map<string, Intl.DateTimeFormat>();
-const zoneYears = new Map<string, ZoneYear>();
-/** Bounds the memory of a process that answers for many zones and years. */
-const MAX_ZONE_YEARS = 2000;
 
 function formatterOf(timeZone: string): Intl.DateTimeFormat {
   const known = formatters.get(timeZone);
@@ -88,7 +87,7 @@ function buildZoneYear(timeZone: string, firstJd: number): ZoneYear {
   const startsJdUt = [firstJd];
   let offset = probe(timeZone, firstJd);
   const offsetsDays = [offset];
-  for (let jd = firstJd; jd < firstJd + 366; jd += PROBE_STEP_DAYS) {
+  for (let jd = firstJd; jd < firstJd + SPAN_DAYS; jd += PROBE_STEP_DAYS) {
     const next = probe(timeZone, jd + PROBE_STEP_DAYS);
     if (next === offset) continue;
     startsJdUt.push(changeBetween(timeZone, jd, jd + PROBE_STEP_DAYS, offset));
@@ -98,20 +97,35 @@ function buildZoneYear(timeZone: string, firstJd: number): ZoneYear {
   return { startsJdUt, offsetsDays };
 }
 
-/**
- * Days to add to UT to get the zone's wall clock at an instant (east positive).
- * @param jdUt Julian Day (UT), 1900 or later
- */
-export function zoneOffsetDays(timeZone: string, jdUt: number): number {
-  const yearIndex = Math.floor((jdUt - JD_J2000) / 365);
-  const key = `${timeZone} ${yearIndex}`;
-  let zoneYear = zoneYears.get(key);
-  if (!zoneYear) {
-    if (zoneYears.size >= MAX_ZONE_YEARS) zoneYears.clear();
-    zoneYear = buildZoneYear(timeZone, JD_J2000 + yearIndex * 365);
-    zoneYears.set(key, zoneYear);
+/** The offsets of one zone, year after year. */
+export class ZoneOffsets {
+  private readonly years = new Map<number, ZoneYear>();
+
+  constructor(private readonly timeZone: string) {}
+
+  /**
+   * Days to add to UT to get the zone's wall clock at an instant (east positive).
+   * @param jdUt Julian Day (UT), 1900 or later
+   */
+  offsetDays(jdUt: number): number {
+    const index = Math.floor((jdUt - JD_J2000) / SPAN_DAYS);
+    const known = this.years.get(index);
+    const span = known ?? buildZoneYear(this.timeZone, JD_J2000 + index * SPAN_DAYS);
+    if (!known) this.years.set(index, span);
+    let change = span.startsJdUt.length - 1;
+    while (change > 0 && (span.startsJdUt[change] ?? 0) > jdUt) change -= 1;
+    return span.offsetsDays[change] ?? 0;
   }
-  let index = zoneYear.startsJdUt.length - 1;
-  while (index > 0 && (zoneYear.startsJdUt[index] ?? 0) > jdUt) index -= 1;
-  return zoneYear.offsetsDays[index] ?? 0;
+}
+
+const zones = new Map<string, ZoneOffsets>();
+
+/** The offsets of a zone; throws a SkyRangeError when the runtime does not know it. */
+export function zoneOffsetsOf(timeZone: string): ZoneOffsets {
+  const known = zones.get(timeZone);
+  if (known) return known;
+  assertTimeZone(timeZone);
+  const made = new ZoneOffsets(timeZone);
+  zones.set(timeZone, made);
+  return made;
 }

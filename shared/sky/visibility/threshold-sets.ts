@@ -54,6 +54,9 @@ const THIRD_CLASS_TO_MAG = 3.5;
 /** The slope of the linear rule continues the classes beyond the third. */
 const DEG_PER_MAG = 1.4;
 
+const FIRST_CLASS: DepthPair = { sameSideDeg: 11, oppositeSideDeg: 7 };
+const FIRST_CLASS_BY_AZIMUTH: DepthPair = { sameSideDeg: 11.5, oppositeSideDeg: 6.5 };
+
 function classDepths(vMag: number, first: DepthPair): DepthPair {
   if (vMag < FIRST_CLASS_BELOW_MAG) return first;
   if (vMag <= SECOND_CLASS_TO_MAG) return { sameSideDeg: 14, oppositeSideDeg: 8.5 };
@@ -73,15 +76,19 @@ function linearDepths(vMag: number): DepthPair {
  */
 export function thresholdOf(set: ThresholdSetId, vMag: number, override: DepthPair | null): Threshold {
   const followsAzimuth = set === 'azimuth-difference';
-  if (override) return { ...override, followsAzimuth, extrapolated: false };
+  if (override) {
+    const { sameSideDeg, oppositeSideDeg } = override;
+    return { sameSideDeg, oppositeSideDeg, followsAzimuth, extrapolated: false };
+  }
   const depths =
     set === 'linear-magnitude'
       ? linearDepths(vMag)
-      : classDepths(
-          vMag,
-          followsAzimuth
-            ? { sameSideDeg: 11.5, oppositeSideDeg: 6.5 }
-            : { sameSideDeg: 11, oppositeSideDeg: 7 },
-        );
-  return { ...depths, followsAzimuth, extrapolated: set !== 'linear-magnitude' && vMag > THIRD_CLASS_TO_MAG };
+      : classDepths(vMag, followsAzimuth ? FIRST_CLASS_BY_AZIMUTH : FIRST_CLASS);
+  const { sameSideDeg, oppositeSideDeg } = depths;
+  return {
+    sameSideDeg,
+    oppositeSideDeg,
+    followsAzimuth,
+    extrapolated: set !== 'linear-magnitude' && vMag > THIRD_CLASS_TO_MAG,
+  };
 }
