@@ -1,4 +1,13 @@
-import type { CalendarDate, CivilDay, MarkerYear, Occurrence, SkyNote } from '#shared/sky/index.js';
+import type {
+  CalendarDate,
+  CivilDay,
+  MarkerYear,
+  Occurrence,
+  Phenomenon,
+  PhenomenonOutcome,
+  SkyNote,
+  StarOutcome,
+} from '#shared/sky/index.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import type { EntryDates, EntryTiming, EntryWarning, LabelledDay, OccurrenceDays } from './entry-model.js';
 import { ENTRY_WARNINGS } from './entry-model.js';
@@ -8,12 +17,35 @@ import { windowOf } from './window.js';
 const WARNED_NOTES = ['weak-marker', 'never-disappears', 'lost-in-light-nights'] as const satisfies SkyNote[];
 
 /**
+ * A marker's year as far as these rules look at it: its days without the geometry of their crossings. That is what
+ * the API hands to the screens, where an editor shows the dates of an entry while it is being written.
+ */
+export interface MarkerDays {
+  markerKey: string;
+  year: number;
+  outcome: StarOutcome;
+  notes: readonly SkyNote[];
+  phenomena: Readonly<
+    Record<Phenomenon, { outcome: PhenomenonOutcome; occurrences: readonly OccurrenceDays[] }>
+  >;
+}
+
+/**
  * What the sky and the rules make of one entry in one civil year. `markerYear` is the leading marker's year at the
  * calendar's place; it is not asked for where a fixed date leads. The answer rests on this entry alone, so the
  * same entry always gives the same answer; what two entries have to do with each other is in `overlap.ts`.
  */
 export function entryDatesOf(timing: EntryTiming, year: number, markerYear: MarkerYear | null): EntryDates {
-  const lead = leadOf(timing, year, markerYear);
+  return entryDatesFromDays(timing, year, markerYear && markerDaysOf(markerYear));
+}
+
+/** The same from days that are at hand already. */
+export function entryDatesFromDays(
+  timing: EntryTiming,
+  year: number,
+  markerDays: MarkerDays | null,
+): EntryDates {
+  const lead = leadOf(timing, year, markerDays);
   const warnings = new Set(lead.warnings);
   let window: EntryDates['window'] = null;
   if (lead.dayNumber !== null) {
@@ -50,7 +82,7 @@ interface Lead {
   warnings: EntryWarning[];
 }
 
-function leadOf({ lead }: EntryTiming, year: number, markerYear: MarkerYear | null): Lead {
+function leadOf({ lead }: EntryTiming, year: number, markerDays: MarkerDays | null): Lead {
   if (lead.type === 'fixed-date') {
     return {
       dayNumber: dayNumberOf(year, lead.date.month, lead.date.day),
@@ -60,28 +92,28 @@ function leadOf({ lead }: EntryTiming, year: number, markerYear: MarkerYear | nu
       warnings: [],
     };
   }
-  if (markerYear?.markerKey !== lead.markerKey || markerYear.year !== year) {
+  if (markerDays?.markerKey !== lead.markerKey || markerDays.year !== year) {
     throw new RangeError(`The entry goes by ${lead.markerKey} in ${year}; another marker's year was given.`);
   }
-  if (markerYear.outcome !== 'rises-and-sets') {
+  if (markerDays.outcome !== 'rises-and-sets') {
     // A star that is always or never there has no first and last days, so there is nothing to say about one of them.
-    return undated(markerYear.outcome, null, 'star-does-not-serve');
+    return undated(markerDays.outcome, null, 'star-does-not-serve');
   }
-  const { outcome, occurrences } = markerYear.phenomena[lead.phenomenon];
+  const { outcome, occurrences } = markerDays.phenomena[lead.phenomenon];
   const occurrence = occurrences[lead.occurrence - 1];
   if (occurrence) {
-    const notes = new Set<SkyNote>([...markerYear.notes, ...occurrence.notes]);
+    const notes = new Set<SkyNote>([...markerDays.notes, ...occurrence.notes]);
     return {
       dayNumber: occurrence.expected.dayNumber,
-      starOutcome: markerYear.outcome,
+      starOutcome: markerDays.outcome,
       phenomenonOutcome: outcome,
-      marker: occurrenceDaysOf(occurrence),
+      marker: { ...occurrence, notes: [...occurrence.notes] },
       warnings: WARNED_NOTES.filter((note) => notes.has(note)),
     };
   }
-  if (occurrences.length > 0) return undated(markerYear.outcome, outcome, 'one-occurrence-only');
+  if (occurrences.length > 0) return undated(markerDays.outcome, outcome, 'one-occurrence-only');
   return undated(
-    markerYear.outcome,
+    markerDays.outcome,
     outcome,
     outcome === 'never-dark-enough' ? 'star-does-not-serve' : 'no-date-this-year',
   );
@@ -93,6 +125,25 @@ function undated(
   warning: EntryWarning,
 ): Lead {
   return { dayNumber: null, starOutcome, phenomenonOutcome, marker: null, warnings: [warning] };
+}
+
+function markerDaysOf({ markerKey, year, outcome, notes, phenomena }: MarkerYear): MarkerDays {
+  const daysOf = (phenomenon: Phenomenon) => ({
+    outcome: phenomena[phenomenon].outcome,
+    occurrences: phenomena[phenomenon].occurrences.map(occurrenceDaysOf),
+  });
+  return {
+    markerKey,
+    year,
+    outcome,
+    notes,
+    phenomena: {
+      'heliacal-rising': daysOf('heliacal-rising'),
+      'cosmical-setting': daysOf('cosmical-setting'),
+      'acronychal-rising': daysOf('acronychal-rising'),
+      'heliacal-setting': daysOf('heliacal-setting'),
+    },
+  };
 }
 
 /** The days of an occurrence without the geometry of its crossings. */

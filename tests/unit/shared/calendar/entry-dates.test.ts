@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { entryDatesOf, inOrder } from '#shared/calendar/entry-dates.js';
-import { markerYear, timing } from '#tests/support/calendar-facts.js';
+import { entryDatesFromDays, entryDatesOf, inOrder, occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
+import { markerYear, occurrence, timing } from '#tests/support/calendar-facts.js';
 
 const june = { expected: '2027-06-07', early: '2027-06-03', late: '2027-06-12' };
 
@@ -171,5 +171,19 @@ describe('warnings', () => {
       'weak-marker',
       'windows-overlap',
     ]);
+  });
+});
+
+describe('days that a screen has at hand', () => {
+  it('give the same answer as the core’s whole result', () => {
+    const whole = markerYear({ occurrences: [june], notes: ['weak-marker'] });
+    const days = {
+      ...whole,
+      phenomena: {
+        ...whole.phenomena,
+        'heliacal-rising': { outcome: 'dated' as const, occurrences: [occurrenceDaysOf(occurrence(june))] },
+      },
+    };
+    expect(entryDatesFromDays(timing(), 2027, days)).toEqual(entryDatesOf(timing(), 2027, whole));
   });
 });
