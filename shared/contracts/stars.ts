@@ -15,7 +15,7 @@ import {
 import { anyDate, id, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
-import { place, skyline } from './places.js';
+import { place, placeInput, skyline } from './places.js';
 
 export const phenomenon = z.enum(PHENOMENA);
 
@@ -135,17 +135,30 @@ export const engineYear = z.coerce.number().int().min(FIRST_YEAR, 'year-range').
 const yearQuery = z.strictObject({ year: engineYear });
 const placeParams = z.strictObject({ placeId: id });
 
+/** A day with its range; the ends are null where the sky never gets dark enough for them. */
+const rangedDay = civilDay.extend({ early: civilDay.nullable(), late: civilDay.nullable() });
+export type RangedDay = z.infer<typeof rangedDay>;
+
 /** Bright stars over the skyline and over a flat horizon, for the place's page. */
 export const skylineEffect = z.strictObject({
   markerKey,
   name: z.string(),
   phenomenon,
-  flat: civilDay.nullable(),
-  hill: civilDay.nullable(),
+  flat: rangedDay.nullable(),
+  hill: rangedDay.nullable(),
   /** Hill minus flat in days; null where one of them has no date. */
   differenceDays: z.number().int().nullable(),
+  /** What stands in place of a hill date that is null. */
+  hillOutcome: z.enum(STAR_OUTCOMES),
+  hillPhenomenonOutcome: z.enum(PHENOMENON_OUTCOMES),
 });
 export type SkylineEffect = z.infer<typeof skylineEffect>;
+
+export const skylinePreviewInput = z.strictObject({
+  place: placeInput,
+  year: z.number('not-a-number').int().min(FIRST_YEAR, 'year-range').max(LAST_YEAR, 'year-range'),
+});
+export type SkylinePreviewInput = z.infer<typeof skylinePreviewInput>;
 
 export const starsEndpoints = {
   list: defineEndpoint({
@@ -190,6 +203,16 @@ export const starsEndpoints = {
     access: member('place', ...ROLES),
     params: placeParams,
     query: yearQuery,
+    response: listOf(skylineEffect),
+  }),
+  previewSkylineEffects: defineEndpoint({
+    id: 'previewSkylineEffects',
+    method: 'POST',
+    path: '/api/communities/:communityId/skyline-effects',
+    summary: 'The same for a place that is not saved yet; nothing is kept',
+    access: member('community', 'officer'),
+    params: z.strictObject({ communityId: id }),
+    body: skylinePreviewInput,
     response: listOf(skylineEffect),
   }),
 } as const;

@@ -1,0 +1,14 @@
+import type { PlaceSnapshot } from '#shared/contracts/stars.js';
+import type { Site, VisibilitySettings } from '#shared/sky/index.js';
+
+/** What a place hands to the sky; its name moves no date. */
+export type WatchedPlace = Omit<PlaceSnapshot, 'name'>;
+
+export function siteOf({ latitudeDeg, longitudeDeg, elevationM, timeZone, skyline }: WatchedPlace): Site {
+  return { latitudeDeg, longitudeDeg, elevationM, timeZone, skyline };
+}
+
+export function settingsOf(place: WatchedPlace): VisibilitySettings {
+  const { thresholdSet, sameSideShiftDeg, oppositeSideShiftDeg, clarityByMonth, skylineRule } = place;
+  return { thresholdSet, sameSideShiftDeg, oppositeSideShiftDeg, clarityByMonth, skylineRule };
+}
