@@ -177,11 +177,15 @@ describe('warnings', () => {
 describe('days that a screen has at hand', () => {
   it('give the same answer as the core’s whole result', () => {
     const whole = markerYear({ occurrences: [june], notes: ['weak-marker'] });
+    const none = { outcome: 'none-in-this-year' as const, occurrences: [] };
+    const { markerKey, year, outcome, notes } = whole;
     const days = {
-      ...whole,
+      ...{ markerKey, year, outcome, notes },
       phenomena: {
-        ...whole.phenomena,
         'heliacal-rising': { outcome: 'dated' as const, occurrences: [occurrenceDaysOf(occurrence(june))] },
+        'cosmical-setting': none,
+        'acronychal-rising': none,
+        'heliacal-setting': none,
       },
     };
     expect(entryDatesFromDays(timing(), 2027, days)).toEqual(entryDatesOf(timing(), 2027, whole));
