@@ -4,14 +4,28 @@ import helmet from 'helmet';
 import { randomUUID } from 'node:crypto';
 import path from 'node:path';
 import { pinoHttp } from 'pino-http';
+import { AuditListService } from './features/audit/audit-list.service.js';
+import { auditRoutes } from './features/audit/audit.routes.js';
+import { calendarsRoutes } from './features/calendars/calendars.routes.js';
+import { CalendarsService } from './features/calendars/calendars.service.js';
+import { EntriesService } from './features/calendars/entries.service.js';
+import { SkyDatesService } from './features/calendars/sky-dates.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
 import { healthRoutes } from './features/health/health.routes.js';
 import { HealthService } from './features/health/health.service.js';
+import { AnswersService } from './features/reviews/answers.service.js';
+import { reviewsRoutes } from './features/reviews/reviews.routes.js';
+import { SigningService } from './features/reviews/signing.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
+import { ComparisonService } from './features/versions/comparison.service.js';
+import { FrozenContentService } from './features/versions/frozen-content.service.js';
+import { PublishingService } from './features/versions/publishing.service.js';
+import { versionsRoutes } from './features/versions/versions.routes.js';
+import { VersionsService } from './features/versions/versions.service.js';
 import type { AppContext } from './http/context.js';
 import { csrfProtection } from './http/csrf.js';
 import { BODY_LIMIT } from './http/limits.js';
@@ -79,6 +93,19 @@ export function createApp(options: AppOptions): App {
   healthRoutes(mount, new HealthService(dataSource), productVersion);
   sessionRoutes(router, mount, sessionService, passport);
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
+
+  const sky = new SkyDatesService();
+  const contents = new FrozenContentService(dataSource, clock, sky);
+  const versions = new VersionsService(dataSource);
+  const publishing = new PublishingService(dataSource, clock, contents, versions);
+  calendarsRoutes(mount, new CalendarsService(dataSource, clock), new EntriesService(dataSource, clock, sky));
+  versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
+  reviewsRoutes(
+    mount,
+    new AnswersService(dataSource, clock),
+    new SigningService(dataSource, clock, versions),
+  );
+  auditRoutes(mount, new AuditListService(dataSource));
 
   app.use(router);
   app.use('/api', nothingHere);

@@ -99,7 +99,10 @@ export const version = versionSummary.extend({
   header: versionHeader,
   headerHash: z.string(),
   entries: z.array(versionEntry),
+  /** What the officer wrote when changes were asked or the version was recalled; empty otherwise. */
+  stateNote: z.string(),
   signatures: z.array(signature),
+  /** As it stood when the draft was submitted. */
   signOffRule,
   gaps: z.array(signOffGap),
   /** What the asking person may do now. */
@@ -109,7 +112,7 @@ export const version = versionSummary.extend({
     signAsSteward: z.boolean(),
     /** Why signing is closed to an elder or a steward; null where it is open or not theirs. */
     signClosedBy: z
-      .enum(['wrote-the-draft', 'answers-missing', 'already-signed', 'not-in-review'])
+      .enum(['wrote-the-draft', 'answers-missing', 'something-stands', 'already-signed', 'not-in-review'])
       .nullable(),
     askChanges: z.boolean(),
     publish: z.boolean(),

@@ -45,6 +45,10 @@ export const texts = {
     'answers-missing': 'Answer every entry first; then you can sign.',
     'wrote-the-draft': 'You wrote to this draft, so somebody else has to sign it.',
     'already-signed': 'You have signed this submission already.',
+    'something-stands':
+      'Yours would be the last signature, but something still stands against an entry. See what is missing.',
+    'own-answer-stands': 'This elder has answered for themselves. Only they can change that answer.',
+    'elder-has-signed': 'This elder has signed, so the answer stays. Take the submission back to ask again.',
     'no-change-asked': 'Only the elder who asked for a change can let it stand.',
     'too-many-entries': 'A calendar holds at most 500 entries. Take one out first.',
     'order-differs': 'The list has changed meanwhile. Load it again, then set the order.',

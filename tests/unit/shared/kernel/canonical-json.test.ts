@@ -5,9 +5,9 @@ import { canonicalJson, CanonicalJsonError, sameJson } from '#shared/kernel/cano
 describe('canonical JSON', () => {
   // RFC 8785 sections 3.2.2 and 3.2.3: sample values given there (from memory).
   it('writes numbers as RFC 8785 shows', () => {
-    expect(canonicalJson([333333333.33333329, 1e30, 4.5, 2e-3, 0.000000000000000000000000001])).toBe(
-      '[333333333.3333333,1e+30,4.5,0.002,1e-27]',
-    );
+    expect(
+      canonicalJson([Number('333333333.33333329'), 1e30, 4.5, 2e-3, 0.000000000000000000000000001]),
+    ).toBe('[333333333.3333333,1e+30,4.5,0.002,1e-27]');
     expect(canonicalJson(-0)).toBe('0');
   });
 
@@ -47,7 +47,7 @@ describe('canonical JSON', () => {
 
   it('holds every JSON value without loss, and its own text again', () => {
     fc.assert(
-      fc.property(fc.jsonValue({ noUnicodeString: false }), (value) => {
+      fc.property(fc.jsonValue({ stringUnit: 'grapheme' }), (value) => {
         const text = canonicalJson(value);
         const back: unknown = JSON.parse(text);
         expect(canonicalJson(back)).toBe(text);

@@ -1,0 +1,72 @@
+import { In, LessThan, type EntityManager } from 'typeorm';
+import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
+import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { CommunityEntity } from '../../db/entities/community.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { PlaceEntity } from '../../db/entities/place.entity.js';
+import { personNames } from '../people/person-names.service.js';
+
+type SubjectType = AuditEventEntity['subjectType'];
+
+/** Newest first, from before the given sequence on. */
+export async function auditPage(
+  manager: EntityManager,
+  communityId: string,
+  before: string | null,
+  limit: number,
+): Promise<AuditEventEntity[]> {
+  return manager.find(AuditEventEntity, {
+    where: before === null ? { communityId } : { communityId, sequence: LessThan(before) },
+    order: { sequence: 'DESC' },
+    take: limit,
+  });
+}
+
+/** How each kind of subject is called today, by id. A calendar is called by its place and year. */
+const NAMES: Readonly<
+  Record<SubjectType, (manager: EntityManager, ids: string[]) => Promise<Map<string, string>>>
+> = {
+  person: (manager, ids) => personNames(manager, ids),
+  community: async (manager, ids) =>
+    new Map((await manager.findBy(CommunityEntity, { id: In(ids) })).map(({ id, name }) => [id, name])),
+  place: async (manager, ids) =>
+    new Map((await manager.findBy(PlaceEntity, { id: In(ids) })).map(({ id, name }) => [id, name])),
+  entry: async (manager, ids) =>
+    new Map(
+      (await manager.findBy(EntryEntity, { id: In(ids) })).map(({ id, content }) => [
+        id,
+        content.titleOfficer,
+      ]),
+    ),
+  calendar: async (manager, ids) =>
+    new Map(
+      (await manager.find(CalendarEntity, { where: { id: In(ids) }, relations: { place: true } })).map(
+        ({ id, place, year }) => [id, `${place.name} ${year}`],
+      ),
+    ),
+  version: async (manager, ids) =>
+    new Map(
+      (
+        await manager.find(CalendarVersionEntity, {
+          where: { id: In(ids) },
+          select: { id: true, calendar: { id: true, year: true, place: { id: true, name: true } } },
+          relations: { calendar: { place: true } },
+        })
+      ).map(({ id, calendar }) => [id, `${calendar.place.name} ${calendar.year}`]),
+    ),
+};
+
+/** Names of all subjects of the rows, by id; what is gone has none. */
+export async function subjectNames(
+  manager: EntityManager,
+  rows: readonly AuditEventEntity[],
+): Promise<Map<string, string>> {
+  const names = new Map<string, string>();
+  for (const type of new Set(rows.map(({ subjectType }) => subjectType))) {
+    const ids = rows.flatMap((row) => (row.subjectType === type && row.subjectId ? [row.subjectId] : []));
+    if (ids.length === 0) continue;
+    for (const [id, name] of await NAMES[type](manager, [...new Set(ids)])) names.set(id, name);
+  }
+  return names;
+}

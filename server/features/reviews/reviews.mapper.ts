@@ -1,0 +1,19 @@
+import type { Answer } from '#shared/contracts/reviews.js';
+import type { AnswerEntity } from '../../db/entities/answer.entity.js';
+
+export function toAnswer(row: AnswerEntity, names: ReadonlyMap<string, string>, askingId: string): Answer {
+  return {
+    id: row.id,
+    entryId: row.entryId,
+    entryHash: row.entryHash,
+    elderId: row.elderId,
+    elderName: names.get(row.elderId) ?? '',
+    answer: row.answer,
+    note: row.note,
+    letStand: row.letStand,
+    recordedByName: row.recordedBy === null ? null : (names.get(row.recordedBy) ?? ''),
+    witness: row.witness,
+    answeredAt: row.answeredAt.toISOString(),
+    mine: row.elderId === askingId || row.recordedBy === askingId,
+  };
+}

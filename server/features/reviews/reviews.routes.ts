@@ -1,0 +1,23 @@
+import { reviewsEndpoints } from '#shared/contracts/reviews.js';
+import type { Mount } from '../../http/mount.js';
+import type { AnswersService } from './answers.service.js';
+import type { SigningService } from './signing.service.js';
+
+export function reviewsRoutes(mount: Mount, answers: AnswersService, signing: SigningService): void {
+  mount.forMember(reviewsEndpoints.listAnswers, ({ params }, actor) =>
+    answers.list(actor, params.calendarId, Number(params.number)),
+  );
+  mount.forMember(reviewsEndpoints.putAnswer, ({ params, body }, actor) =>
+    answers.put(actor, params.calendarId, Number(params.number), params.entryId, body),
+  );
+  mount.forMember(reviewsEndpoints.takeBackAnswer, async ({ params }, actor) => {
+    await answers.takeBack(actor, params.calendarId, Number(params.number), params.entryId);
+    return undefined;
+  });
+  mount.forMember(reviewsEndpoints.letStand, ({ params }, actor) =>
+    answers.letStand(actor, params.calendarId, Number(params.number), params.entryId),
+  );
+  mount.forMember(reviewsEndpoints.sign, ({ params, body }, actor) =>
+    signing.sign(actor, params.calendarId, Number(params.number), body.role),
+  );
+}

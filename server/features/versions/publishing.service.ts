@@ -1,0 +1,183 @@
+import { mayBecome, versionLabel, type VersionState } from '#shared/calendar/version-state.js';
+import type { AuditAction } from '#shared/contracts/audit.js';
+import type { Version } from '#shared/contracts/versions.js';
+import { randomUUID } from 'node:crypto';
+import type { DataSource, EntityManager } from 'typeorm';
+import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { CommunityEntity } from '../../db/entities/community.entity.js';
+import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import { inTransaction } from '../../db/in-transaction.js';
+import type { Actor } from '../../http/actor.js';
+import { conflict, notFound, type ProblemReason } from '../../http/app-error.js';
+import type { Clock } from '../../http/context.js';
+import { recordAudit } from '../audit/audit.service.js';
+import { draftWriterIds, forgetContributions, lockCalendar } from '../calendars/draft.service.js';
+import type { FrozenContentService } from './frozen-content.service.js';
+import { seal, type SealedEntry } from './seal.service.js';
+import { earlierSeals, findVersion } from './versions.repository.js';
+import type { VersionsService } from './versions.service.js';
+
+/** The officer's part of a version's life: submit, take back, publish, recall. */
+export class PublishingService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+    private readonly contents: FrozenContentService,
+    private readonly versions: VersionsService,
+  ) {}
+
+  /** Freezes the draft: from here on its text never changes, and the draft is locked until this one is decided. */
+  async submit(actor: Actor, calendarId: string): Promise<Version> {
+    return inTransaction(this.dataSource, async (manager) => {
+      const calendar = await lockCalendar(manager, calendarId);
+      if (calendar.outNumber !== null) throw conflict('submission-out');
+      const at = this.clock.now();
+      const { header, entries } = await this.contents.draftContent(manager, calendar, at);
+      if (entries.length === 0) throw conflict('no-entries');
+      if (header.weatherContact === '' || header.agricultureContact === '')
+        throw conflict('contacts-missing');
+      const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
+      const sealed = seal(header, entries, await earlierSeals(manager, calendarId));
+      const row = manager.create(CalendarVersionEntity, {
+        id: randomUUID(),
+        calendarId,
+        number: header.number,
+        label: null,
+        state: 'in-review',
+        stateNote: '',
+        headerText: sealed.headerText,
+        headerHash: sealed.headerHash,
+        hash: sealed.hash,
+        signOffRule: community.signOffRule,
+        writerIds: await draftWriterIds(manager, calendarId),
+        submittedBy: actor.person.id,
+        submittedAt: at,
+        publishedAt: null,
+      });
+      await manager.insert(CalendarVersionEntity, row);
+      await insertEntries(manager, row.id, sealed.entries);
+      await manager.update(
+        CalendarEntity,
+        { id: calendarId },
+        { outNumber: header.number, submissionCount: header.number, updatedAt: at },
+      );
+      await this.record(manager, actor, row, 'submitted', { hash: sealed.hash });
+      return this.versions.describe(manager, actor, row);
+    });
+  }
+
+  /** Final for this submission; the draft opens again. */
+  async askChanges(
+    actor: Actor,
+    calendarId: string,
+    number: number,
+    { reason, note }: { reason: 'taken-back' | 'elder-asked'; note: string },
+  ): Promise<Version> {
+    return this.change(actor, calendarId, number, 'changes-asked', 'not-in-review', async (manager, row) => {
+      await manager.update(
+        CalendarEntity,
+        { id: calendarId },
+        { outNumber: null, updatedAt: this.clock.now() },
+      );
+      await this.record(manager, actor, row, 'changes-asked', { reason });
+      return { stateNote: note };
+    });
+  }
+
+  /** Gives the label; the version before it becomes replaced, and whoever wrote so far may sign the next one. */
+  async publish(actor: Actor, calendarId: string, number: number): Promise<Version> {
+    return this.change(
+      actor,
+      calendarId,
+      number,
+      'published',
+      'not-signed-off',
+      async (manager, row, calendar) => {
+        const at = this.clock.now();
+        const label = versionLabel(calendar.year, calendar.labelCount + 1);
+        const previous = await manager.findOneBy(CalendarVersionEntity, { calendarId, state: 'published' });
+        if (previous !== null) {
+          await manager.update(CalendarVersionEntity, { id: previous.id }, { state: 'replaced' });
+          await this.record(manager, actor, previous, 'replaced', { label: previous.label, by: label });
+        }
+        await manager.update(
+          CalendarEntity,
+          { id: calendarId },
+          { outNumber: null, publishedNumber: number, labelCount: calendar.labelCount + 1, updatedAt: at },
+        );
+        await forgetContributions(manager, calendarId);
+        await this.record(manager, actor, row, 'published', { label });
+        return { label, publishedAt: at };
+      },
+    );
+  }
+
+  /** The version stays readable and says that it was recalled; the one before it does not come back by itself. */
+  async recall(actor: Actor, calendarId: string, number: number, note: string): Promise<Version> {
+    return this.change(actor, calendarId, number, 'recalled', 'not-published', async (manager, row) => {
+      await manager.update(
+        CalendarEntity,
+        { id: calendarId },
+        { publishedNumber: null, updatedAt: this.clock.now() },
+      );
+      await this.record(manager, actor, row, 'recalled', { label: row.label });
+      return { stateNote: note };
+    });
+  }
+
+  private async change(
+    actor: Actor,
+    calendarId: string,
+    number: number,
+    to: VersionState,
+    otherwise: ProblemReason,
+    work: (
+      manager: EntityManager,
+      row: CalendarVersionEntity,
+      calendar: CalendarEntity,
+    ) => Promise<Partial<Pick<CalendarVersionEntity, 'stateNote' | 'label' | 'publishedAt'>>>,
+  ): Promise<Version> {
+    return inTransaction(this.dataSource, async (manager) => {
+      const calendar = await lockCalendar(manager, calendarId);
+      const row = await findVersion(manager, calendarId, number);
+      if (row === null) throw notFound();
+      if (!mayBecome(row.state, to)) throw conflict(otherwise);
+      const changes = { ...(await work(manager, row, calendar)), state: to };
+      await manager.update(CalendarVersionEntity, { id: row.id }, changes);
+      return this.versions.describe(manager, actor, Object.assign(row, changes));
+    });
+  }
+
+  private async record(
+    manager: EntityManager,
+    actor: Actor,
+    row: CalendarVersionEntity,
+    action: AuditAction,
+    details: Record<string, unknown>,
+  ): Promise<void> {
+    await recordAudit(manager, {
+      at: this.clock.now(),
+      communityId: actor.communityId,
+      actorId: actor.person.id,
+      action,
+      subjectType: 'version',
+      subjectId: row.id,
+      details: { calendarId: row.calendarId, number: row.number, ...details },
+    });
+  }
+}
+
+/** A statement must stay well below what the database takes at once (16 MiB by default). */
+const ENTRIES_PER_STATEMENT = 100;
+
+async function insertEntries(
+  manager: EntityManager,
+  versionId: string,
+  entries: readonly SealedEntry[],
+): Promise<void> {
+  const rows = entries.map((entry, position) => ({ id: randomUUID(), versionId, position, ...entry }));
+  for (let start = 0; start < rows.length; start += ENTRIES_PER_STATEMENT) {
+    await manager.insert(VersionEntryEntity, rows.slice(start, start + ENTRIES_PER_STATEMENT));
+  }
+}

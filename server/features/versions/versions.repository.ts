@@ -1,0 +1,70 @@
+import type { EntityManager } from 'typeorm';
+import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { SignatureEntity } from '../../db/entities/signature.entity.js';
+import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+
+export async function findVersion(
+  manager: EntityManager,
+  calendarId: string,
+  number: number,
+): Promise<CalendarVersionEntity | null> {
+  return manager.findOneBy(CalendarVersionEntity, { calendarId, number });
+}
+
+export async function frozenEntries(
+  manager: EntityManager,
+  versionId: string,
+): Promise<VersionEntryEntity[]> {
+  return manager.find(VersionEntryEntity, { where: { versionId }, order: { position: 'ASC' } });
+}
+
+export async function signaturesOf(manager: EntityManager, versionId: string): Promise<SignatureEntity[]> {
+  return manager.find(SignatureEntity, { where: { versionId }, order: { signedAt: 'ASC', id: 'ASC' } });
+}
+
+export interface EntrySeal {
+  salt: string;
+  hash: string;
+}
+
+/** Every salt and hash under which the calendar's entries were frozen before, by entry; newest first. */
+export async function earlierSeals(
+  manager: EntityManager,
+  calendarId: string,
+): Promise<Map<string, EntrySeal[]>> {
+  const rows = await manager
+    .createQueryBuilder(VersionEntryEntity, 'frozen')
+    .innerJoin('frozen.calendarVersion', 'version')
+    .select('frozen.entryId', 'entryId')
+    .addSelect('frozen.salt', 'salt')
+    .addSelect('frozen.hash', 'hash')
+    .addSelect('MAX(version.number)', 'newest')
+    .where('version.calendarId = :calendarId', { calendarId })
+    .groupBy('frozen.entryId')
+    .addGroupBy('frozen.salt')
+    .addGroupBy('frozen.hash')
+    .orderBy('newest', 'DESC')
+    .getRawMany<{ entryId: string; salt: string; hash: string }>();
+  const seals = new Map<string, EntrySeal[]>();
+  for (const { entryId, salt, hash } of rows) {
+    const known = seals.get(entryId);
+    if (known) known.push({ salt, hash });
+    else seals.set(entryId, [{ salt, hash }]);
+  }
+  return seals;
+}
+
+export async function entryCountsByVersion(
+  manager: EntityManager,
+  calendarId: string,
+): Promise<Map<string, number>> {
+  const rows = await manager
+    .createQueryBuilder(VersionEntryEntity, 'frozen')
+    .innerJoin('frozen.calendarVersion', 'version')
+    .select('frozen.versionId', 'versionId')
+    .addSelect('COUNT(*)', 'count')
+    .where('version.calendarId = :calendarId', { calendarId })
+    .groupBy('frozen.versionId')
+    .getRawMany<{ versionId: string; count: string }>();
+  return new Map(rows.map((row) => [row.versionId, Number(row.count)]));
+}

@@ -1,0 +1,98 @@
+import { signingObstacle, signOffGaps, type ReviewState } from '#shared/calendar/sign-off.js';
+import { isOut } from '#shared/calendar/version-state.js';
+import type { SignOffGap, Version, VersionEntry, VersionSummary } from '#shared/contracts/versions.js';
+import type { DataSource, EntityManager } from 'typeorm';
+import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { hasRole, type Actor } from '../../http/actor.js';
+import { personNames } from '../people/person-names.service.js';
+import { frozenContent, isVisible, visibleVersion } from './frozen-content.service.js';
+import { readReviewState } from './review-state.service.js';
+import { toSignature, toSummary } from './versions.mapper.js';
+import { entryCountsByVersion, signaturesOf } from './versions.repository.js';
+
+/** Reading versions. What changes their state is in publishing.service.ts and in the reviews. */
+export class VersionsService {
+  constructor(private readonly dataSource: DataSource) {}
+
+  /** Newest first; whoever sees no drafts sees what was published. */
+  async list(actor: Actor, calendarId: string): Promise<VersionSummary[]> {
+    const { manager } = this.dataSource;
+    const rows = await manager.find(CalendarVersionEntity, {
+      where: { calendarId },
+      order: { number: 'DESC' },
+    });
+    const visible = rows.filter(({ state }) => isVisible(actor, state));
+    const counts = await entryCountsByVersion(manager, calendarId);
+    const names = await personNames(
+      manager,
+      visible.map(({ submittedBy }) => submittedBy),
+    );
+    return visible.map((row) => toSummary(row, names.get(row.submittedBy) ?? '', counts.get(row.id) ?? 0));
+  }
+
+  async read(actor: Actor, calendarId: string, number: number): Promise<Version> {
+    const { manager } = this.dataSource;
+    return this.describe(manager, actor, await visibleVersion(manager, actor, calendarId, number));
+  }
+
+  /** The whole version for the person who asks, with what they may do now. */
+  async describe(manager: EntityManager, actor: Actor, row: CalendarVersionEntity): Promise<Version> {
+    const { header, entries } = await frozenContent(manager, row);
+    const signatures = await signaturesOf(manager, row.id);
+    const review = await readReviewState(manager, row);
+    const names = await personNames(manager, [
+      row.submittedBy,
+      ...signatures.map(({ personId }) => personId),
+      ...row.signOffRule.mustSign,
+      ...row.signOffRule.oneOf,
+    ]);
+    return {
+      ...toSummary(row, names.get(row.submittedBy) ?? '', entries.length),
+      stateNote: row.stateNote,
+      header,
+      headerHash: row.headerHash,
+      entries,
+      signatures: signatures.map((signature) => toSignature(signature, names)),
+      signOffRule: row.signOffRule,
+      gaps: row.state === 'in-review' ? namedGaps(review, entries, names) : [],
+      may: mayDo(actor, row, review),
+    };
+  }
+}
+
+function namedGaps(
+  review: ReviewState,
+  entries: readonly VersionEntry[],
+  names: ReadonlyMap<string, string>,
+): SignOffGap[] {
+  const titles = new Map(entries.map(({ entryId, content }) => [entryId, content.titleOfficer]));
+  return signOffGaps(review).map(({ code, personIds, entryIds, count }) => ({
+    code,
+    names: [...personIds.map((id) => names.get(id) ?? ''), ...entryIds.map((id) => titles.get(id) ?? '')],
+    count,
+  }));
+}
+
+function mayDo(actor: Actor, row: CalendarVersionEntity, review: ReviewState): Version['may'] {
+  const inReview = row.state === 'in-review';
+  const obstacles = (['elder', 'steward'] as const)
+    .filter((role) => hasRole(actor, role))
+    .map((role) => ({
+      role,
+      obstacle: signingObstacle({ personId: actor.person.id, role }, review, inReview),
+    }));
+  const open = new Set(obstacles.filter(({ obstacle }) => obstacle === null).map(({ role }) => role));
+  const officer = hasRole(actor, 'officer');
+  const hasSigned = review.signatures.some(
+    ({ personId, role }) => personId === actor.person.id && role === 'elder',
+  );
+  return {
+    answer: inReview && hasRole(actor, 'elder') && !hasSigned,
+    signAsElder: open.has('elder'),
+    signAsSteward: open.has('steward'),
+    signClosedBy: open.size > 0 ? null : (obstacles[0]?.obstacle ?? null),
+    askChanges: officer && isOut(row.state),
+    publish: officer && row.state === 'signed-off',
+    recall: officer && row.state === 'published',
+  };
+}
