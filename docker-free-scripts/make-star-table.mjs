@@ -6,18 +6,21 @@ import { fileURLToPath } from 'node:url';
 const input = fileURLToPath(new URL('../tests/fixtures/sky/bright-stars.csv', import.meta.url));
 const output = fileURLToPath(new URL('../shared/sky/data/star-rows.ts', import.meta.url));
 
-const [header, ...lines] = readFileSync(input, 'utf8').trim().split('\n');
+const [header = '', ...lines] = readFileSync(input, 'utf8').trim().split('\n');
 const columns = header.split(',');
+/** @type {(value: string) => string} */
 const text = (value) => `'${value.replaceAll("'", "\\'")}'`;
+/** @type {(value: string) => string} */
 const number = (value) => (value === '' ? 'null' : String(Number(value)));
-const kinds = { name: text, bayer: text, flamsteed: text, constellation: text };
+/** Columns that hold text; the others hold numbers. */
+const textColumns = new Set(['name', 'bayer', 'flamsteed', 'constellation']);
 
 const rows = lines.map((line) => {
   const cells = line.split(',');
   if (cells.length !== columns.length) throw new Error(`not ${columns.length} cells: ${line}`);
   return `  [${cells
     .slice(0, -1) // B−V is not used by the core
-    .map((cell, index) => (kinds[columns[index]] ?? number)(cell))
+    .map((cell, index) => (textColumns.has(columns[index] ?? '') ? text(cell) : number(cell)))
     .join(', ')}],`;
 });
 

@@ -23,6 +23,15 @@ function assertNumber(
   }
 }
 
+/** Callers from untyped places (a file, a request) may hand over anything. */
+function isPlainObject(value: unknown): value is object {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
+
+function isList(value: unknown): value is readonly unknown[] {
+  return Array.isArray(value);
+}
+
 function assertOneOf(field: string, value: unknown, words: readonly string[]): void {
   if (typeof value !== 'string' || !words.includes(value)) {
     throw new SkyRangeError(field, `Give one of these words: ${words.join(', ')}.`);
@@ -47,7 +56,7 @@ export function assertLongitude(value: unknown, field: string): void {
 }
 
 function assertSkyline(skyline: readonly SkylinePoint[], field: string): void {
-  if (!Array.isArray(skyline))
+  if (!isList(skyline))
     throw new SkyRangeError(field, 'Give a list of points; an empty one is a flat horizon.');
   const altitudes = new Map<number, number>();
   skyline.forEach((point, index) => {
@@ -71,7 +80,7 @@ function assertSkyline(skyline: readonly SkylinePoint[], field: string): void {
 }
 
 export function assertSite(site: Site): void {
-  if (typeof site !== 'object' || site === null) throw new SkyRangeError('site', 'Give a place.');
+  if (!isPlainObject(site)) throw new SkyRangeError('site', 'Give a place.');
   assertLatitude(site.latitudeDeg, 'site.latitudeDeg');
   assertLongitude(site.longitudeDeg, 'site.longitudeDeg');
   assertNumber('site.elevationM', site.elevationM, ELEVATION_M.min, ELEVATION_M.max, 'metres');
@@ -80,8 +89,7 @@ export function assertSite(site: Site): void {
 }
 
 export function assertSettings(settings: VisibilitySettings): void {
-  if (typeof settings !== 'object' || settings === null)
-    throw new SkyRangeError('settings', 'Give the settings.');
+  if (!isPlainObject(settings)) throw new SkyRangeError('settings', 'Give the settings.');
   assertOneOf('settings.thresholdSet', settings.thresholdSet, THRESHOLD_SETS);
   assertOneOf('settings.skylineRule', settings.skylineRule, SKYLINE_RULES);
   assertNumber(
@@ -99,16 +107,16 @@ export function assertSettings(settings: VisibilitySettings): void {
     'degrees',
   );
   const months = settings.clarityByMonth;
-  if (!Array.isArray(months) || months.length !== 12) {
+  if (!isList(months) || months.length !== 12) {
     throw new SkyRangeError('settings.clarityByMonth', 'Give twelve words, January first.');
   }
-  months.forEach((clarity: unknown, index) => {
+  months.forEach((clarity, index) => {
     assertOneOf(`settings.clarityByMonth.${index}`, clarity, CLARITIES);
   });
 }
 
 export function assertQuestion(question: DepthAtCrossingCase): void {
-  if (typeof question !== 'object' || question === null || Array.isArray(question)) {
+  if (!isPlainObject(question)) {
     throw new SkyRangeError(
       'case',
       'Give an object with hr, latitudeDeg, longitudeDeg, year, skylineDeg, thresholdsDeg.',
@@ -124,8 +132,7 @@ export function assertQuestion(question: DepthAtCrossingCase): void {
     SKYLINE_ALTITUDE_DEG.max,
     'degrees',
   );
-  const thresholds: unknown = question.thresholdsDeg;
-  if (typeof thresholds !== 'object' || thresholds === null || Array.isArray(thresholds)) {
+  if (!isPlainObject(question.thresholdsDeg)) {
     throw new SkyRangeError('thresholdsDeg', 'Give an object with sameSide and oppositeSide.');
   }
   for (const side of ['sameSide', 'oppositeSide'] as const) {

@@ -73,6 +73,11 @@ export {
   type ThresholdSetFacts,
 } from './visibility/threshold-sets.js';
 
+/** A value from outside in a sentence; text in quotes, so that an empty one is seen. */
+function shown(value: unknown): string {
+  return typeof value === 'string' ? `"${value}"` : String(value);
+}
+
 function markerOf(markerKey: MarkerKey): ResolvedMarker {
   const marker = resolveMarker(markerKey);
   if (!marker) {
@@ -139,10 +144,7 @@ export function depthAtCrossingYear(question: DepthAtCrossingCase): DepthAtCross
   assertQuestion(question);
   const marker = resolveMarker(markerKeyOf(question.hr));
   if (!marker)
-    throw new SkyRangeError(
-      'hr',
-      `Give an HR number of the star table; ${JSON.stringify(question.hr) ?? 'nothing'} is not in it.`,
-    );
+    throw new SkyRangeError('hr', `Give an HR number of the star table; ${shown(question.hr)} is not in it.`);
   return depthAtCrossingOf(preparedYearOf(question.year), marker, question);
 }
 

@@ -10,14 +10,14 @@ import type {
   VisibilitySettings,
 } from '../types.js';
 import { RAD_PER_DEG } from '../units/angle.js';
-import { PHENOMENA, type Phenomenon } from '../vocabulary.js';
+import { type Clarity, PHENOMENA, type Phenomenon } from '../vocabulary.js';
 import { expectedAroundYear } from './expected-crossing.js';
 import { markerKeyOf, type ResolvedMarker } from './marker-key.js';
 import { type MarkerAtPlace, markerAtPlace, placeYearOf } from './place-year.js';
 
 /** Expected days only, without ranges and descriptions. */
 
-const ALL_YEAR_ORDINARY = Object.freeze(new Array(12).fill('ordinary' as const));
+const ALL_YEAR_ORDINARY: readonly Clarity[] = new Array<Clarity>(12).fill('ordinary');
 
 function expectedDays(marker: MarkerAtPlace, phenomenon: Phenomenon): number[] {
   const facts = PHENOMENON_FACTS[phenomenon];
