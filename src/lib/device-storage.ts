@@ -31,6 +31,20 @@ export function forget(key: string): void {
   }
 }
 
+/** Everything kept whose key begins so, with the rest of each key: one calendar's unsaved entries, for instance. */
+export function readAllKept(keyStart: string): Map<string, unknown> {
+  const found = new Map<string, unknown>();
+  try {
+    const full = PREFIX + keyStart;
+    for (const key of Object.keys(localStorage)) {
+      if (key.startsWith(full)) found.set(key.slice(full.length), readKept(key.slice(PREFIX.length)));
+    }
+  } catch {
+    // Nothing can be read, so nothing was kept.
+  }
+  return found;
+}
+
 /** Forgets every kept thing whose key begins so: one person's drafts when they sign out, for instance. */
 export function forgetAll(keyStart: string): void {
   try {

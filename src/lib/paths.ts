@@ -24,6 +24,12 @@ export const PATTERNS = {
 
 type VersionNumber = number | 'draft';
 
+/** What a new entry shall go by. */
+interface MarkerQuery {
+  marker?: string | undefined;
+  phenomenon?: string | undefined;
+}
+
 export const paths = {
   today: () => PATTERNS.today,
   signIn: (next?: string) => withQuery(PATTERNS.signIn, { next }),
@@ -41,9 +47,10 @@ export const paths = {
   villagePlaces: () => PATTERNS.villagePlaces,
   villageSettings: () => PATTERNS.villageSettings,
   villageRecords: () => PATTERNS.villageRecords,
-  calendars: () => PATTERNS.calendars,
-  calendar: (calendarId: string, query: { entry?: string } = {}) =>
-    withQuery(calendarPath(calendarId), query),
+  /** With a marker, the person chooses a calendar and a new entry then goes by it. */
+  calendars: (query: MarkerQuery = {}) => withQuery(PATTERNS.calendars, { ...query }),
+  calendar: (calendarId: string, query: { entry?: string } & MarkerQuery = {}) =>
+    withQuery(calendarPath(calendarId), { ...query }),
   versions: (calendarId: string) => `${calendarPath(calendarId)}/versions`,
   version: (calendarId: string, number: VersionNumber) => versionPath(calendarId, number),
   review: (calendarId: string, number: VersionNumber, query: { entry?: string } = {}) =>

@@ -1,0 +1,43 @@
+import { queryOptions } from '@tanstack/react-query';
+import { calendarsEndpoints } from '#shared/contracts/calendars.js';
+import { peopleEndpoints } from '#shared/contracts/people.js';
+import { versionsEndpoints } from '#shared/contracts/versions.js';
+import { callApi } from './api-client.js';
+
+/**
+ * What several features read of calendars, their versions and their village. Everything of one calendar hangs
+ * below `['calendars', calendarId]`, so one call tells all of it to look again.
+ */
+export const calendarKeys = {
+  all: ['calendars'] as const,
+  one: (calendarId: string) => ['calendars', calendarId] as const,
+  entries: (calendarId: string) => ['calendars', calendarId, 'entries'] as const,
+  versions: (calendarId: string) => ['calendars', calendarId, 'versions'] as const,
+  version: (calendarId: string, number: number) => ['calendars', calendarId, 'versions', number] as const,
+  answers: (calendarId: string, number: number) =>
+    ['calendars', calendarId, 'versions', number, 'answers'] as const,
+};
+
+export function calendarQuery(calendarId: string) {
+  return queryOptions({
+    queryKey: [...calendarKeys.one(calendarId), 'calendar'],
+    queryFn: ({ signal }) => callApi(calendarsEndpoints.read, { params: { calendarId }, signal }),
+  });
+}
+
+/** Submissions and published versions, newest first. */
+export function versionsQuery(calendarId: string) {
+  return queryOptions({
+    queryKey: [...calendarKeys.versions(calendarId), 'list'],
+    queryFn: async ({ signal }) =>
+      (await callApi(versionsEndpoints.list, { params: { calendarId }, signal })).items,
+  });
+}
+
+/** Languages, contacts and the sign-off rule of a village. */
+export function communityQuery(communityId: string) {
+  return queryOptions({
+    queryKey: ['community', communityId],
+    queryFn: ({ signal }) => callApi(peopleEndpoints.readCommunity, { params: { communityId }, signal }),
+  });
+}
