@@ -1,0 +1,49 @@
+// npm run bench            a table for people
+// npm run bench -- --json  one JSON line
+import { DAILY_SEARCH_STAR, dailySearchStarYear, scanStarYear } from './comparisons.js';
+import { medianMs } from './stopwatch.js';
+import { benchSettings, benchSite, hillSite } from './subject.js';
+
+import { expectedDates, prepareYear, STARS } from '#shared/sky/index.js';
+
+/** 100 epochs over all years that the engine offers. */
+const EPOCHS = Array.from({ length: 100 }, (_, index) => -3000 + 60 * index);
+
+const wholeSkyYear = (site: typeof benchSite, year: number): void => {
+  expectedDates(site, benchSettings, year, prepareYear(year));
+};
+
+const wholeSkyYearMs = medianMs(25, () => wholeSkyYear(benchSite, 2027));
+const wholeSkyYearHillsMs = medianMs(15, () => wholeSkyYear(hillSite, 2027));
+const hundredEpochsMs = medianMs(3, () => {
+  for (const year of EPOCHS) wholeSkyYear(benchSite, year);
+});
+const crossingScanStarYearMs = medianMs(3, scanStarYear);
+const dailySearchStarYearMs = medianMs(3, dailySearchStarYear);
+
+const rounded = (value: number): number => Number(value.toPrecision(4));
+const results = {
+  wholeSkyYearMs: rounded(wholeSkyYearMs),
+  wholeSkyYearHillsMs: rounded(wholeSkyYearHillsMs),
+  hundredEpochsMs: rounded(hundredEpochsMs),
+  crossingScanStarYearMs: rounded(crossingScanStarYearMs),
+  dailySearchStarYearMs: rounded(dailySearchStarYearMs),
+  ratio: Math.round((dailySearchStarYearMs * STARS.length) / wholeSkyYearMs),
+};
+
+const meanings: Record<keyof typeof results, string> = {
+  wholeSkyYearMs: `${STARS.length} stars × 4 expected dates, one place, one year, preparation included (aim 10)`,
+  wholeSkyYearHillsMs: 'the same over a skyline of 36 points',
+  hundredEpochsMs: 'the same for 100 epochs from −3000 to 2940, flat horizon (aim 400)',
+  crossingScanStarYearMs: 'one star-year by the plain scan that the tests use as oracle',
+  dailySearchStarYearMs: `one star-year by astronomy-engine’s daily rise and set search (${DAILY_SEARCH_STAR})`,
+  ratio: 'daily search for the whole table ÷ whole sky (aim 5000)',
+};
+
+if (process.argv.includes('--json')) {
+  process.stdout.write(`${JSON.stringify(results)}\n`);
+} else {
+  for (const key of Object.keys(results) as (keyof typeof results)[]) {
+    process.stdout.write(`${key.padEnd(24)} ${String(results[key]).padStart(9)}  ${meanings[key]}\n`);
+  }
+}
