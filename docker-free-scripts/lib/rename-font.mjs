@@ -37,6 +37,7 @@ export function fontName(font, nameId) {
 
 /** @param {Buffer} font @returns {Map<string, Buffer>} */
 function readTables(font) {
+  /** @type {Map<string, Buffer>} */
   const tables = new Map();
   for (let index = 0; index < font.readUInt16BE(4); index++) {
     const record = 12 + index * 16;
@@ -52,10 +53,13 @@ function readTables(font) {
 /** English names of the Windows platform, by name id. @param {Buffer} table @returns {Map<number, string>} */
 function readNames(table) {
   const texts = table.readUInt16BE(4);
+  /** @type {Map<number, string>} */
   const names = new Map();
   for (let index = 0; index < table.readUInt16BE(2); index++) {
     const record = 6 + index * 12;
-    const isEnglish = WINDOWS_UNICODE_ENGLISH.every((value, field) => table.readUInt16BE(record + field * 2) === value);
+    const isEnglish = WINDOWS_UNICODE_ENGLISH.every(
+      (value, field) => table.readUInt16BE(record + field * 2) === value,
+    );
     if (!isEnglish) continue;
     const start = texts + table.readUInt16BE(record + 10);
     const utf16 = Buffer.from(table.subarray(start, start + table.readUInt16BE(record + 8))).swap16();
@@ -70,6 +74,7 @@ function writeNames(names) {
   const header = Buffer.alloc(6 + filled.length * 12);
   header.writeUInt16BE(filled.length, 2);
   header.writeUInt16BE(header.length, 4);
+  /** @type {Buffer[]} */
   const texts = [];
   let offset = 0;
   filled.forEach(([nameId, text], index) => {
@@ -92,6 +97,7 @@ function writeTables(version, tables) {
   header.writeUInt16BE(power * 16, 6);
   header.writeUInt16BE(Math.log2(power), 8);
   header.writeUInt16BE((sorted.length - power) * 16, 10);
+  /** @type {Buffer[]} */
   const bodies = [];
   let offset = header.length;
   sorted.forEach(([tag, body], index) => {

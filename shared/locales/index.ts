@@ -32,12 +32,5 @@ export const en = {
 
 export type Namespace = keyof typeof en;
 
-export const NAMESPACES = Object.keys(en) as readonly Namespace[];
-
-/** Languages with a folder of texts, in the order in which a person chooses among them. */
-export const LANGUAGES = ['en'] as const;
-export type Language = (typeof LANGUAGES)[number];
-export const DEFAULT_LANGUAGE: Language = 'en';
-
 /** Every text of every language: what a server or a test hands to i18next. */
 export const resources = { en } as const;

@@ -17,7 +17,7 @@ export function createRouter(queryClient: QueryClient): ReturnType<typeof create
     {
       // Asked while the page's own code is still on its way; a failure shows where the session is used.
       loader: () => {
-        void queryClient.prefetchQuery(sessionQuery);
+        queryClient.query(sessionQuery).catch(() => undefined);
         return null;
       },
       shouldRevalidate: () => false,

@@ -51,7 +51,7 @@ const FORMS: Record<DayForm, Intl.DateTimeFormatOptions> = {
   'short-year': { day: 'numeric', month: 'short', year: 'numeric' },
 };
 
-export function dateWords(t: TFunction<'common'>, language: string): DateWords {
+export function dateWords(t: TFunction, language: string): DateWords {
   const locale = intlLocale(language);
   const format = (date: PlainDate, options: Intl.DateTimeFormatOptions) =>
     holdTogether(
@@ -108,7 +108,7 @@ export function dateWords(t: TFunction<'common'>, language: string): DateWords {
   };
 }
 
-function momentWords(t: TFunction<'common'>, locale: string, instant: Date, now: Date): string {
+function momentWords(t: TFunction, locale: string, instant: Date, now: Date): string {
   const time = new Intl.DateTimeFormat(locale, {
     hour: '2-digit',
     minute: '2-digit',

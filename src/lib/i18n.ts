@@ -1,6 +1,7 @@
 import i18next, { type BackendModule, type i18n as I18n } from 'i18next';
 import { initReactI18next } from 'react-i18next';
-import { DEFAULT_LANGUAGE, LANGUAGES, NAMESPACES, type en } from '#shared/locales/index.js';
+import type { en, Namespace } from '#shared/locales/index.js';
+import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
 import { texts as common } from '#shared/locales/en/common.js';
 import { texts as problems } from '#shared/locales/en/problems.js';
 
@@ -58,7 +59,7 @@ export async function startI18n(language: string = DEFAULT_LANGUAGE): Promise<I1
 }
 
 /** For a route that wants its texts together with its code. */
-export async function loadNamespaces(...namespaces: (typeof NAMESPACES)[number][]): Promise<void> {
+export async function loadNamespaces(...namespaces: Namespace[]): Promise<void> {
   await i18next.loadNamespaces(namespaces);
 }
 

@@ -38,7 +38,7 @@ export function Mast({ title, under, backTo, children }: MastProps) {
     const isFirst = !firstScreenIsOpen;
     firstScreenIsOpen = true;
     // Never pull a person out of a field of the new screen.
-    const holdsFocus = document.activeElement?.closest('main') != null;
+    const holdsFocus = document.activeElement?.closest('main') instanceof HTMLElement;
     if (!isFirst && !holdsFocus) heading.current?.focus({ preventScroll: true });
   }, []);
   return (

@@ -1,14 +1,5 @@
 import { Undo2, X } from 'lucide-react';
-import {
-  createContext,
-  useCallback,
-  useContext,
-  useEffect,
-  useMemo,
-  useRef,
-  useState,
-  type ReactNode,
-} from 'react';
+import { createContext, useCallback, useContext, useEffect, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 
 export interface ToastOptions {
@@ -27,6 +18,7 @@ const SayContext = createContext<Say | null>(null);
 
 const PLAIN_MS = 6_000;
 const UNDO_MS = 20_000;
+const AGAIN_MS = 1_500;
 const AT_ONCE_MAX = 3;
 
 /** Says what happened, at the foot of the screen. It waits while the pointer or the focus is on it. */
@@ -40,9 +32,8 @@ export function ToastProvider({ children }: { children: ReactNode }) {
   const drop = useCallback((id: number) => {
     setItems((before) => before.filter((item) => item.id !== id));
   }, []);
-  const value = useMemo(() => say, [say]);
   return (
-    <SayContext value={value}>
+    <SayContext value={say}>
       {children}
       <div className="toasts" role="status" aria-live="polite" aria-relevant="additions">
         {items.map((item) => (
@@ -62,28 +53,21 @@ export function useToast(): Say {
 
 function Toast({ item, onGone }: { item: ToastItem; onGone: (id: number) => void }) {
   const { t } = useTranslation('common');
-  const [held, setHeld] = useState(false);
+  const box = useRef<HTMLDivElement>(null);
   const { id, onUndo } = item;
   useEffect(() => {
-    if (held) return undefined;
-    const timer = setTimeout(
-      () => {
-        onGone(id);
-      },
-      onUndo ? UNDO_MS : PLAIN_MS,
-    );
+    const look = () => {
+      // Somebody is reading it or about to press: ask again a little later.
+      if (box.current?.matches(':hover, :focus-within') === true) timer = setTimeout(look, AGAIN_MS);
+      else onGone(id);
+    };
+    let timer = setTimeout(look, onUndo ? UNDO_MS : PLAIN_MS);
     return () => {
       clearTimeout(timer);
     };
-  }, [held, id, onUndo, onGone]);
-  const hold = () => {
-    setHeld(true);
-  };
-  const letGo = () => {
-    setHeld(false);
-  };
+  }, [id, onUndo, onGone]);
   return (
-    <div className="toast" onPointerEnter={hold} onPointerLeave={letGo} onFocus={hold} onBlur={letGo}>
+    <div className="toast" ref={box}>
       <span>{item.text}</span>
       <span className="flex flex-none">
         {onUndo && (

@@ -11,6 +11,7 @@ export const texts = {
     calendar: 'Calendar',
     village: 'Village',
     account: 'You and this device',
+    who: '{{name}}, {{roles}}',
   },
 
   undo: 'Undo',

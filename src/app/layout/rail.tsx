@@ -2,6 +2,7 @@ import { UserRound } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { Link, useLocation } from 'react-router-dom';
 import { useCommunityChoice } from '#src/lib/community.js';
+import { listWords } from '#src/lib/list-words.js';
 import { paths } from '#src/lib/paths.js';
 import { useSession } from '#src/lib/session.js';
 import { IconLink } from '#src/ui/button.js';
@@ -10,10 +11,11 @@ import { placeOfPath, RAIL_PLACES } from './rail-places.js';
 
 /** The line with its holes; the peg stands where you are. At the foot on a phone, on top from 1024 px. */
 export function Rail() {
-  const { t } = useTranslation('common');
+  const { t, i18n } = useTranslation('common');
   const { pathname } = useLocation();
   const { person } = useSession();
   const { community } = useCommunityChoice();
+  const roles = (community?.roles ?? []).map((role) => t(`role.${role}`));
   const here = placeOfPath(pathname);
   return (
     <nav className="rail" aria-label={t('rail.label')}>
@@ -34,7 +36,9 @@ export function Rail() {
       <div className="rail-end">
         <span className="rail-who">
           {community?.communityName}
-          <span className="block text-umber-soft">{person?.displayName}</span>
+          <span className="block text-umber-soft">
+            {t('rail.who', { name: person?.displayName ?? '', roles: listWords(roles, i18n.language) })}
+          </span>
         </span>
         <IconLink to={paths.account()} label={t('rail.account')} icon={<UserRound aria-hidden size={24} />} />
       </div>

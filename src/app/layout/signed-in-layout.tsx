@@ -3,7 +3,7 @@ import { useTranslation } from 'react-i18next';
 import { Navigate, Outlet, useLocation, useMatches } from 'react-router-dom';
 import { CurrentCommunityProvider, useCommunityChoice } from '#src/lib/community.js';
 import { usePageTitle } from '#src/lib/page-title.js';
-import { paths } from '#src/lib/paths.js';
+import { PATTERNS, paths } from '#src/lib/paths.js';
 import { useSession } from '#src/lib/session.js';
 import { IconLink } from '#src/ui/button.js';
 import { Mast, MastEnd, Page } from '#src/ui/page.js';
@@ -22,18 +22,21 @@ export function SignedInLayout() {
   if (person === null) {
     return <Navigate to={paths.signIn(location.pathname + location.search)} replace />;
   }
+  const isAccount = location.pathname === PATTERNS.account;
   const hasRail = matches.every(({ handle }) => (handle as RouteHandle | undefined)?.rail !== false);
   return (
     <CurrentCommunityProvider>
       <MastEnd
         value={
-          <span className="phone-only">
-            <IconLink
-              to={paths.account()}
-              label={t('rail.account')}
-              icon={<UserRound aria-hidden size={24} />}
-            />
-          </span>
+          isAccount ? null : (
+            <span className="phone-only">
+              <IconLink
+                to={paths.account()}
+                label={t('rail.account')}
+                icon={<UserRound aria-hidden size={24} />}
+              />
+            </span>
+          )
         }
       >
         <Frame rail={hasRail ? <Rail /> : null}>

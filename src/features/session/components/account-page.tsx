@@ -1,6 +1,7 @@
 import { LogOut } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { useCommunityChoice } from '#src/lib/community.js';
+import { listWords } from '#src/lib/list-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useSession } from '#src/lib/session.js';
@@ -55,7 +56,7 @@ export function AccountPage() {
 
 /** Which village is on screen; each with what the person is there. */
 function VillageBoard() {
-  const { t } = useTranslation(['session', 'common']);
+  const { t, i18n } = useTranslation(['session', 'common']);
   const { community, memberships, choose } = useCommunityChoice();
   const say = useToast();
   if (community === null) {
@@ -81,7 +82,10 @@ function VillageBoard() {
         options={memberships.map(({ communityId, communityName, roles }) => ({
           value: communityId,
           label: communityName,
-          note: roles.map((role) => t(`common:role.${role}`)).join(', '),
+          note: listWords(
+            roles.map((role) => t(`common:role.${role}`)),
+            i18n.language,
+          ),
         }))}
       />
     </Board>

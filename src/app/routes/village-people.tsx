@@ -1,0 +1,1 @@
+export { PeoplePage as Component } from '#src/features/people/components/people-page.js';

@@ -1,0 +1,1 @@
+export { SettingsPage as Component } from '#src/features/people/components/settings-page.js';
