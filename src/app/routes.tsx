@@ -24,4 +24,7 @@ export const personRoutes: readonly AppRoute[] = [
 ];
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
-export const villageRoutes: readonly AppRoute[] = [];
+export const villageRoutes: readonly AppRoute[] = [
+  { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  { path: PATTERNS.villageSettings, texts: ['people'], load: () => import('./routes/village-settings.js') },
+];

@@ -1,0 +1,27 @@
+import { useTranslation } from 'react-i18next';
+import { useCurrentCommunity, useRoles } from '#src/lib/community.js';
+import { paths } from '#src/lib/paths.js';
+import { TabLinks } from '#src/ui/pick.js';
+
+/** The parts of the village; each is an address. Villagers and staff see those that are theirs. */
+export function VillageTabs() {
+  const { t } = useTranslation('people');
+  const { is } = useRoles();
+  const inner = is('steward', 'officer', 'elder');
+  return (
+    <TabLinks
+      label={t('tabs.label')}
+      links={[
+        { to: paths.villagePlaces(), label: t('tabs.places') },
+        ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
+        { to: paths.villageSettings(), label: t('tabs.settings') },
+        ...(inner ? [{ to: paths.villageRecords(), label: t('tabs.records') }] : []),
+      ]}
+    />
+  );
+}
+
+/** Title of every village page. */
+export function useVillageName(): string {
+  return useCurrentCommunity().communityName;
+}
