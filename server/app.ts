@@ -18,9 +18,15 @@ import { HealthService } from './features/health/health.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
 import { SigningService } from './features/reviews/signing.service.js';
+import { placesRoutes } from './features/places/places.routes.js';
+import { PlacesService } from './features/places/places.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
+import { SkyYearsService } from './features/stars/sky-years.service.js';
+import { SkylineEffectsService } from './features/stars/skyline-effects.service.js';
+import { starsRoutes } from './features/stars/stars.routes.js';
+import { StarsService } from './features/stars/stars.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
 import { PublishingService } from './features/versions/publishing.service.js';
@@ -93,6 +99,12 @@ export function createApp(options: AppOptions): App {
   healthRoutes(mount, new HealthService(dataSource), productVersion);
   sessionRoutes(router, mount, sessionService, passport);
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
+
+  const places = new PlacesService(dataSource, clock);
+  const skyYears = new SkyYearsService();
+  const stars = new StarsService(places, skyYears);
+  placesRoutes(mount, places);
+  starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
 
   const sky = new SkyDatesService();
   const contents = new FrozenContentService(dataSource, clock, sky);

@@ -1,6 +1,7 @@
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
+import { texts as files } from './en/files.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as problems } from './en/problems.js';
@@ -18,6 +19,7 @@ import { texts as today } from './en/today.js';
 export const en = {
   common,
   session,
+  files,
   people,
   places,
   stars,

@@ -1,0 +1,55 @@
+/** English words of files that leave the house: tables and what stands on printed boards about their making. */
+export const texts = {
+  starsCsv: {
+    fileName: '{{place}} {{year}} stars',
+    kind: 'kind',
+    kinds: { star: 'star', figure: 'group of stars' },
+    name: 'name',
+    designation: 'designation',
+    hr: 'HR number',
+    magnitude: 'magnitude V',
+    does: 'what it does here',
+    outcome: {
+      'rises-and-sets': 'rises and sets',
+      'never-sets': 'never sets',
+      'never-clears-skyline': 'never clears the skyline',
+      'never-rises': 'never rises',
+      'below-skyline': 'stays below the skyline',
+    },
+    nightsHidden: 'nights hidden',
+    notes: 'notes',
+    note: {
+      'never-disappears': 'never hidden, so no return to wait for',
+      'weak-marker': 'weak marker: its range is over three weeks',
+      'lost-in-light-nights': 'lost in light nights',
+      'threshold-extrapolated': 'the eye-and-air rule was stretched beyond its data',
+    },
+    calendar: 'calendar of the dates',
+    calendars: { gregorian: 'Gregorian', julian: 'Julian' },
+    expected: '{{phenomenon}}: expected',
+    early: '{{phenomenon}}: earliest',
+    late: '{{phenomenon}}: latest',
+    dayNumber: '{{phenomenon}}: Julian Day Number',
+    remark: '{{phenomenon}}: remark',
+    secondExpected: '{{phenomenon}}, second time: expected',
+    secondEarly: '{{phenomenon}}, second time: earliest',
+    secondLate: '{{phenomenon}}, second time: latest',
+    none: {
+      'none-in-this-year': 'none in this year',
+      'never-dark-enough': 'never dark enough',
+    },
+    place: 'place',
+    year: 'year',
+    basis: 'basis',
+    caution: 'caution',
+  },
+  basis:
+    'Dawnpeg, engine {{engineVersion}}; eye-and-air rule: {{rule}}; shifts {{sameSideShiftDeg}}° and {{oppositeSideShiftDeg}}°; skyline rule: {{skylineRule}}; star data: Bright Star Catalogue, 5th revised edition.',
+  skylineRule: {
+    'depth-at-crossing': 'depth at the crossing',
+    'altitude-difference': 'altitude difference',
+    flat: 'flat horizon',
+  },
+  caution:
+    'Stars mark the season, they do not forecast the weather: follow the weather service and the agricultural office before committing seed. Haze, cloud, the Moon, hills and eyes can move a sighting by several days. Never look at the Sun.',
+} as const;
