@@ -26,5 +26,10 @@ export const personRoutes: readonly AppRoute[] = [
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  {
+    path: PATTERNS.villageRecords,
+    texts: ['audit', 'people'],
+    load: () => import('./routes/village-records.js'),
+  },
   { path: PATTERNS.villageSettings, texts: ['people'], load: () => import('./routes/village-settings.js') },
 ];

@@ -1,0 +1,50 @@
+import type { TFunction } from 'i18next';
+import type { AuditEvent } from '#shared/contracts/audit.js';
+import { ROLES, type Role } from '#shared/contracts/people.js';
+import { texts } from '#shared/locales/en/audit.js';
+import { listWords } from '#src/lib/list-words.js';
+
+type Words = TFunction<['audit', 'common']>;
+type Field = keyof typeof texts.field;
+
+/** One row of the records as a sentence. Unknown codes of a newer release become general words, never nothing. */
+export function auditSentence(t: Words, language: string, event: AuditEvent): string {
+  const { details } = event;
+  const list = (values: readonly string[]) => listWords(values, language);
+  const roles = (value: unknown) => list(asRoles(value).map((role) => t(`common:role.${role}`)));
+  return t(`audit:sentence.${event.action}`, {
+    actor: event.actorName === '' ? t('audit:somebody') : event.actorName,
+    subject: event.subjectName ?? t('audit:gone'),
+    roles: roles(details['roles']),
+    before: roles(details['before']),
+    after: roles(details['after']),
+    role: roles([details['role']]),
+    fields: list(asTexts(details['fields']).map((field) => t(`audit:field.${asField(field)}`))),
+    number: asText(details['number']),
+    label: asText(details['label']),
+    by: asText(details['by']),
+    reason:
+      details['reason'] === 'elder-asked' ? t('audit:reason.elder-asked') : t('audit:reason.taken-back'),
+    answer: isAnswer(details['answer']) ? t(`audit:answer.${details['answer']}`) : '',
+  });
+}
+
+function asText(value: unknown): string {
+  return typeof value === 'string' || typeof value === 'number' ? String(value) : '';
+}
+
+function asTexts(value: unknown): string[] {
+  return Array.isArray(value) ? value.map(asText) : [];
+}
+
+function asRoles(value: unknown): Role[] {
+  return ROLES.filter((role) => asTexts(value).includes(role));
+}
+
+function asField(field: string): Field {
+  return field in texts.field ? (field as Field) : 'other';
+}
+
+function isAnswer(value: unknown): value is keyof typeof texts.answer {
+  return typeof value === 'string' && value in texts.answer;
+}
