@@ -1,7 +1,5 @@
-import { AstroTime, SunPosition } from 'astronomy-engine';
-
-import { JD_J2000 } from '../time/julian-day.js';
-import { RAD_PER_DEG, TAU, wrapPi } from '../units/angle.js';
+import { TAU, wrapPi } from '../units/angle.js';
+import { sunLongitudeRad } from './sun-longitude.js';
 
 /**
  * The Sun's apparent ecliptic longitude (true equinox of date, light time and aberration included) around an epoch.
@@ -25,8 +23,7 @@ const MEAN_MOTION_RAD_PER_DAY = TAU / 365.2422;
 export function prepareSunTable(epochJdUt: number): SunTable {
   const nodes = new Float64Array(2 * HALF_NODES + 1).fill(Number.NaN);
   const firstJd = epochJdUt - HALF_NODES * STEP_DAYS;
-  const exact = (jdUt: number): number => SunPosition(new AstroTime(jdUt - JD_J2000)).elon * RAD_PER_DEG;
-  const atEpoch = exact(epochJdUt);
+  const atEpoch = sunLongitudeRad(epochJdUt);
 
   const node = (index: number): number => {
     const known = nodes[index];
@@ -35,7 +32,7 @@ export function prepareSunTable(epochJdUt: number): SunTable {
     const jdUt = firstJd + index * STEP_DAYS;
     // The true longitude never strays more than a few degrees from the mean one, so the right turn is the nearest.
     const mean = atEpoch + (jdUt - epochJdUt) * MEAN_MOTION_RAD_PER_DAY;
-    const value = mean + wrapPi(exact(jdUt) - mean);
+    const value = mean + wrapPi(sunLongitudeRad(jdUt) - mean);
     nodes[index] = value;
     return value;
   };
