@@ -1,0 +1,261 @@
+import { barLegend } from './bar-legend.js';
+import { daysInMonth, isoOf, nextLeapYears, weekdayOf } from './civil-days.js';
+import { dayHole, laneMiddle, rowBars } from './day-row.js';
+import type { DayRow } from './day-row.js';
+import { lanesOfRow } from './lanes.js';
+import type { RowLanes, RowSpan } from './lanes.js';
+import { cardHead, holesOfMonth } from './month-head.js';
+import { monthWords, undatedWords } from './month-words.js';
+import { barDown, FOOT, pageFoot } from './page-foot.js';
+import type { Primitive, SheetPage } from './primitives.js';
+import type { SheetModel } from './sheet-model.js';
+import { spansOfMonth } from './spans.js';
+import { rule } from './strokes.js';
+import { capHeightMm, leadingMm, textBlock, textOnBaseline, wrapText } from './text-layout.js';
+import type { TextMeasurer, TextStyle } from './text-layout.js';
+import { watermarked } from './watermark.js';
+import { flowBlocks, LEGEND, LEGEND_BOLD, planCard, plainBlock } from './word-block.js';
+import type { WordRow } from './word-block.js';
+
+/** Month cards: A4 upright, seven holes a week, 25.4 mm apart both ways, like a bought pegboard. */
+export const CARD_PITCH_MM = 25.4;
+export const CARD_WIDTH_MM = 210;
+export const CARD_HEIGHT_MM = 297;
+const LEFT_MM = 16.1;
+const RIGHT_MM = LEFT_MM + 7 * CARD_PITCH_MM;
+const BOTTOM_MM = CARD_HEIGHT_MM - 8;
+const BAR_DOWN_X_MM = 10.6;
+const BAR_DOWN_TOP_MM = 62;
+const LANES_TOP_MM = 8.8;
+const LANES_HEIGHT_MM = 16.2;
+const MAX_LANES = 4;
+const WEEKDAY: TextStyle = { role: 'weekday', sizePt: 14, weight: 400 };
+const AREA = { left: LEFT_MM, right: RIGHT_MM };
+
+/** Twelve cards, each followed by what did not fit on it at full size, and a last one for what has no date. */
+export function monthCards(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
+  const months = Array.from({ length: 12 }, (_, index) => index + 1);
+  return [
+    ...months.flatMap((month) => cardsOfMonth(model, month, measurer)),
+    ...undatedCards(model, measurer),
+  ];
+}
+
+function cardsOfMonth(model: SheetModel, month: number, measurer: TextMeasurer): SheetPage[] {
+  const grid = monthGrid(model, month, measurer);
+  const foot = pageFoot(model, AREA, namesMarkers(model, month), measurer);
+  const footTop = BOTTOM_MM - foot.height;
+  const name = model.words.monthName(month).officer;
+  const pointer = plainBlock(model.words.moreOnNextCard(name), LEGEND_BOLD, AREA, measurer);
+  const wordsTop = grid.bottom + 1;
+  const fresh = continuationTop(model, month, measurer);
+  const { here, onward } = planCard(
+    monthWords(model, month, AREA, measurer),
+    footTop - wordsTop - 0.5,
+    pointer.height,
+  );
+  const hereRows = [...here, ...(onward.length > 0 ? [pointer] : [])].flatMap(({ rows }) => rows);
+  const following = flowBlocks(onward, footTop - fresh - 2);
+  const cards = following.length + 1;
+  const ofMonth = (card: number): string => model.words.cardOf({ month: name, card, cards });
+  return [
+    page(
+      model,
+      { kind: 'month-card', month, name },
+      [...grid.primitives, ...stack(hereRows, wordsTop), ...foot.draw(footTop)],
+      measurer,
+    ),
+    ...following.map((rows, index) => {
+      const head = continuationHead(model, month, ofMonth(index + 2), measurer);
+      return page(
+        model,
+        { kind: 'continuation', month, name: ofMonth(index + 2) },
+        [...head, ...stack(rows, fresh), ...foot.draw(footTop)],
+        measurer,
+      );
+    }),
+  ];
+}
+
+function undatedCards(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
+  const blocks = undatedWords(model, AREA, measurer).map(({ full }) => full);
+  if (blocks.length === 0) return [];
+  const foot = pageFoot(model, AREA, false, measurer);
+  const footTop = BOTTOM_MM - foot.height;
+  const heading = model.words.noDateHeading(model.year);
+  const head = cardHead(model, null, heading, AREA, measurer);
+  const top = head.bottom + 4;
+  return flowBlocks(blocks, footTop - top - 2).map((rows) =>
+    page(
+      model,
+      { kind: 'continuation', month: null, name: heading },
+      [
+        ...head.primitives,
+        rule(LEFT_MM, RIGHT_MM, head.bottom + 1.5),
+        ...stack(rows, top),
+        ...foot.draw(footTop),
+      ],
+      measurer,
+    ),
+  );
+}
+
+function page(
+  model: SheetModel,
+  about: Pick<SheetPage, 'kind' | 'month' | 'name'>,
+  primitives: readonly Primitive[],
+  measurer: TextMeasurer,
+): SheetPage {
+  const withBar = [
+    ...primitives,
+    ...barDown(
+      model,
+      { x: BAR_DOWN_X_MM, top: BAR_DOWN_TOP_MM, textBaseline: BAR_DOWN_X_MM + 3.8 },
+      measurer,
+    ),
+  ];
+  return {
+    ...about,
+    width: CARD_WIDTH_MM,
+    height: CARD_HEIGHT_MM,
+    trim: null,
+    primitives: watermarked(
+      model,
+      withBar,
+      { x: LEFT_MM, y: 46, width: RIGHT_MM - LEFT_MM, height: 150 },
+      measurer,
+    ),
+  };
+}
+
+function stack(rows: readonly WordRow[], top: number): Primitive[] {
+  let y = top;
+  return rows.flatMap((row) => {
+    const drawn = row.draw(y);
+    y += row.height;
+    return drawn;
+  });
+}
+
+/** Dawn and dusk are spoken of where a marker's range touches the month. */
+function namesMarkers(model: SheetModel, month: number): boolean {
+  return spansOfMonth(model.year, month, model.markers, []).length > 0;
+}
+
+function continuationTop(model: SheetModel, month: number, measurer: TextMeasurer): number {
+  return cardHead(model, month, holesOfMonth(model, month), AREA, measurer).bottom + 4;
+}
+
+function continuationHead(
+  model: SheetModel,
+  month: number,
+  second: string,
+  measurer: TextMeasurer,
+): Primitive[] {
+  const head = cardHead(model, month, second, AREA, measurer);
+  return [...head.primitives, rule(LEFT_MM, RIGHT_MM, continuationTop(model, month, measurer) - 2.5)];
+}
+
+/** Title, weekdays, holes, bars and the key to the bars. */
+function monthGrid(
+  model: SheetModel,
+  month: number,
+  measurer: TextMeasurer,
+): { primitives: Primitive[]; bottom: number } {
+  const { words, year } = model;
+  const head = cardHead(model, month, holesOfMonth(model, month), AREA, measurer);
+  const gridTop = Math.max(46, head.bottom + 7.6);
+  const firstWeekday = model.firstWeekday ?? 1;
+  const lead = (weekdayOf(isoOf(year, month, 1)) - firstWeekday + 7) % 7;
+  const days = daysInMonth(year, month);
+  const weeks = Math.ceil((lead + days) / 7);
+  const spans = spansOfMonth(year, month, model.markers, model.entries);
+  const primitives: Primitive[] = [...head.primitives];
+  const shown: RowSpan[] = [];
+
+  for (let column = 0; column < 7; column += 1) {
+    const x = LEFT_MM + column * CARD_PITCH_MM + 3.1;
+    const name = words.weekdayShort(((firstWeekday - 1 + column) % 7) + 1);
+    primitives.push(textOnBaseline([name], { x, baseline: gridTop - 2 }, WEEKDAY, measurer));
+  }
+  for (let week = 0; week < weeks; week += 1) {
+    const from = Math.max(1, week * 7 - lead + 1);
+    const to = Math.min(days, week * 7 - lead + 7);
+    const lanes = lanesOfRow(spans, from, to, MAX_LANES);
+    const row = weekRow(gridTop + week * CARD_PITCH_MM, week * 7 - lead + 1, lanes);
+    primitives.push(rule(LEFT_MM, RIGHT_MM, row.top));
+    for (let day = from; day <= to; day += 1) {
+      const isLeapDay = month === 2 && day === 29;
+      primitives.push(...dayHole(row, { date: isoOf(year, month, day), number: day, isLeapDay }, measurer));
+    }
+    primitives.push(...rowBars(row, lanes, measurer), ...leftOver(model, row, from, lanes, measurer));
+    shown.push(...lanes.placed);
+  }
+  const gridBottom = gridTop + weeks * CARD_PITCH_MM;
+  primitives.push(rule(LEFT_MM, RIGHT_MM, gridBottom));
+
+  let bottom = gridBottom + 0.6;
+  if (month === 2 && days === 29) {
+    const note = leapNote(
+      model,
+      { column: (lead + 28) % 7, rowTop: gridBottom - CARD_PITCH_MM, bottom },
+      measurer,
+    );
+    primitives.push(...note.primitives);
+    bottom = note.bottom;
+  }
+  const key = barLegend(model, shown, { left: LEFT_MM, right: RIGHT_MM, top: bottom }, measurer);
+  return { primitives: [...primitives, ...key.primitives], bottom: bottom + key.height };
+}
+
+function weekRow(top: number, firstDay: number, lanes: RowLanes): DayRow {
+  const used = Math.max(3, lanes.laneCount + (lanes.left.length > 0 ? 1 : 0));
+  return {
+    leftOf: (day) => LEFT_MM + (day - firstDay) * CARD_PITCH_MM,
+    pitchMm: CARD_PITCH_MM,
+    top,
+    ringDx: 6.15,
+    ringDy: 4.9,
+    lanesTop: LANES_TOP_MM,
+    lanePitchMm: LANES_HEIGHT_MM / used,
+  };
+}
+
+/** Names of the bars that a week has no room for: their numbers where these fit, else how many they are. */
+function leftOver(
+  model: SheetModel,
+  row: DayRow,
+  firstDay: number,
+  lanes: RowLanes,
+  measurer: TextMeasurer,
+): Primitive[] {
+  if (lanes.left.length === 0) return [];
+  const x = row.leftOf(firstDay) + 0.2;
+  const numbers = `+ ${lanes.left.map(({ tag }) => tag).join(', ')}`;
+  const fits = measurer.widthMm(numbers, FOOT) <= RIGHT_MM - x;
+  const text = fits ? numbers : model.words.moreBars(lanes.left.length);
+  const baseline = laneMiddle(row, lanes.laneCount) + capHeightMm(FOOT.sizePt) / 2;
+  return [textOnBaseline([text], { x, baseline, figures: true }, FOOT, measurer)];
+}
+
+/** Beside 29 February: the years that have it. In the free cells to its right, or under the holes. */
+function leapNote(
+  model: SheetModel,
+  at: { readonly column: number; readonly rowTop: number; readonly bottom: number },
+  measurer: TextMeasurer,
+): { primitives: Primitive[]; bottom: number } {
+  const text = model.words.leapYearsOnly(nextLeapYears(model.year, 3));
+  const left = LEFT_MM + (at.column + 1) * CARD_PITCH_MM + 2;
+  const beside = RIGHT_MM - left > 45 ? wrapText(text, RIGHT_MM - left, FOOT, measurer) : [];
+  if (beside.length > 0 && beside.length * leadingMm(FOOT) < CARD_PITCH_MM - 1) {
+    return {
+      primitives: [textBlock(beside, { x: left, top: at.rowTop + 0.8 }, FOOT, measurer)],
+      bottom: at.bottom,
+    };
+  }
+  const lines = wrapText(text, RIGHT_MM - LEFT_MM, LEGEND, measurer);
+  return {
+    primitives: [textBlock(lines, { x: RIGHT_MM, top: at.bottom, align: 'right' }, LEGEND, measurer)],
+    bottom: at.bottom + lines.length * leadingMm(LEGEND),
+  };
+}
