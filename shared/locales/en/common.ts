@@ -37,6 +37,9 @@ export const texts = {
   sortDown: '{{column}}, sorted, largest or latest first',
   sortNone: '{{column}}, not sorted',
 
+  monthBefore: 'The month before',
+  monthAfter: 'The month after',
+
   closedButton: 'Not yet: {{reason}}',
 
   pegsDone: '{{done}} of {{total}}',

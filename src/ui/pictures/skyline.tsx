@@ -27,7 +27,8 @@ export interface SkylineScale {
 
 export interface SkylinePictureProps {
   points: readonly HorizonPoint[];
-  view: SkylineView;
+  /** Fixed, or made for the width in pixels that the picture gets. */
+  view: SkylineView | ((width: number) => SkylineView);
   height: number;
   label: string;
   /** Dotted lines at these altitudes; 0 is drawn white across the ground. */
@@ -43,8 +44,9 @@ export interface SkylinePictureProps {
 
 /** The skyline of a place as a silhouette, straight between its points as the engine reckons it. */
 export function SkylinePicture(props: SkylinePictureProps) {
-  const { points, view, height, label, levelsDeg = [], behind, inFront, onTop, className } = props;
+  const { points, height, label, levelsDeg = [], behind, inFront, onTop, className } = props;
   const [ref, width] = useWidth(600);
+  const view = typeof props.view === 'function' ? props.view(width) : props.view;
   const scale = scaleOf(view, width, height);
   const outline = horizonWithin(points, view)
     .map((point) => `${scale.x(point.azimuthDeg).toFixed(1)} ${scale.y(point.altitudeDeg).toFixed(1)}`)

@@ -1,0 +1,239 @@
+import type { ReactNode } from 'react';
+import { classNames } from '../class-names.js';
+import { horizonAltitude, SkylinePicture, type HorizonPoint, type SkylineScale } from './skyline.js';
+
+export interface PathPoint {
+  azimuthDeg: number;
+  altitudeDeg: number;
+}
+
+export interface LookLabel extends PathPoint {
+  key: string;
+  words: ReactNode;
+}
+
+export interface LookPictureProps {
+  /** Skyline of the place. */
+  points: readonly HorizonPoint[];
+  /** Where the star stands while it can be seen; drawn thick. In order of time. */
+  seenPath: readonly PathPoint[];
+  /** Where it still stands when it is too light, or not dark enough; drawn dotted. Joined to the other by you. */
+  lightPath: readonly PathPoint[];
+  /** Where the star itself is drawn. */
+  star: PathPoint;
+  /** Where the path ends because the Sun comes: a bar across it. */
+  stop?: PathPoint | undefined;
+  /** Times and words beside the path: live text on top of the picture. */
+  labels: readonly LookLabel[];
+  /** Compass words along the foot. */
+  compass: readonly { azimuthDeg: number; words: string }[];
+  /** `1 hand`, beside the rod. */
+  handWords: string;
+  /** Light over the skyline. */
+  light?: boolean | undefined;
+  /** The picture as a sentence. */
+  label: string;
+  height?: number | undefined;
+  className?: string | undefined;
+}
+
+/** A fist at the end of a straight arm. */
+const HAND_DEG = 10;
+const GROUND_DEG = 6;
+const ROD_X = 14;
+const ROD_WIDTH = 20;
+
+/** Where to look: the skyline of the place, the star's path above it, and a rod in half hands beside it. */
+export function LookPicture(props: LookPictureProps) {
+  const { points, star, compass, labels, label, height = 210, light = true, className } = props;
+  const middleDeg = star.azimuthDeg;
+  const horizonDeg = horizonAltitude(points, middleDeg);
+  // One hand is as long across as it is high: the picture never stretches the sky.
+  const highest = Math.max(
+    ...[star, ...props.seenPath, ...props.lightPath].map((point) => point.altitudeDeg),
+  );
+  const topDeg = Math.max(horizonDeg + 1.7 * HAND_DEG, highest + 2);
+  const bottomDeg = horizonDeg - GROUND_DEG;
+  const view = (width: number) => {
+    const halfTurn = (((topDeg - bottomDeg) / height) * width) / 2;
+    return { fromAzimuthDeg: middleDeg - halfTurn, toAzimuthDeg: middleDeg + halfTurn, topDeg, bottomDeg };
+  };
+  return (
+    <SkylinePicture
+      className={classNames('look', className)}
+      points={points}
+      view={view}
+      height={height}
+      label={label}
+      behind={(scale) => light && <DawnLight scale={scale} horizonDeg={horizonDeg} middleDeg={middleDeg} />}
+      inFront={(scale) => (
+        <>
+          {compass.map(({ azimuthDeg }) => (
+            <rect
+              key={azimuthDeg}
+              x={scale.x(azimuthDeg) - 1}
+              y={height - 10}
+              width={2.5}
+              height={10}
+              fill="var(--color-chalk)"
+            />
+          ))}
+          <Rod scale={scale} points={points} />
+          <Paths {...props} scale={scale} />
+        </>
+      )}
+      onTop={(scale) => (
+        <>
+          <span
+            className="on-picture"
+            style={{ left: ROD_X + ROD_WIDTH + 16, top: rodTickY(scale, points) - 10 }}
+          >
+            {props.handWords}
+          </span>
+          {labels.map((each) => (
+            <Beside key={each.key} at={each} scale={scale}>
+              {each.words}
+            </Beside>
+          ))}
+          <div className="under-picture">
+            {compass.map(({ azimuthDeg, words }) => (
+              <span key={azimuthDeg} style={compassPlace(scale.x(azimuthDeg), scale.width)}>
+                {words}
+              </span>
+            ))}
+          </div>
+        </>
+      )}
+    />
+  );
+}
+
+function DawnLight({
+  scale,
+  horizonDeg,
+  middleDeg,
+}: {
+  scale: SkylineScale;
+  horizonDeg: number;
+  middleDeg: number;
+}) {
+  const edge = scale.y(horizonDeg + 0.45 * HAND_DEG);
+  const crown = scale.y(horizonDeg + 0.95 * HAND_DEG);
+  const middle = scale.x(middleDeg);
+  return (
+    <path
+      className="pic-dawnlight"
+      d={`M0 ${String(scale.height)}V${String(edge)}Q${String(middle)} ${String(crown)} ${String(scale.width)} ${String(edge)}V${String(scale.height)}Z`}
+    />
+  );
+}
+
+function rodTickY(scale: SkylineScale, points: readonly HorizonPoint[]): number {
+  return rodFootY(scale, points) - handPx(scale);
+}
+
+function rodFootY(scale: SkylineScale, points: readonly HorizonPoint[]): number {
+  const pxPerDeg = handPx(scale) / HAND_DEG;
+  const leftAzimuth = (ROD_X + ROD_WIDTH / 2) / pxPerDeg;
+  // Inverse of scale.x at the rod: both axes have the same scale.
+  const zero = -scale.x(0) / pxPerDeg;
+  return scale.y(horizonAltitude(points, zero + leftAzimuth));
+}
+
+function handPx(scale: SkylineScale): number {
+  return scale.y(0) - scale.y(HAND_DEG);
+}
+
+/** Three half hands, dark and light in turn, with a tick at one hand. */
+function Rod({ scale, points }: { scale: SkylineScale; points: readonly HorizonPoint[] }) {
+  const foot = rodFootY(scale, points);
+  const half = handPx(scale) / 2;
+  return (
+    <>
+      {[0, 1, 2].map((step) => (
+        <rect
+          key={step}
+          x={ROD_X}
+          y={foot - (step + 1) * half}
+          width={ROD_WIDTH}
+          height={half}
+          fill={step % 2 === 0 ? 'var(--color-umber)' : 'var(--color-chalk)'}
+          stroke="var(--color-umber)"
+          strokeWidth={2}
+        />
+      ))}
+      <rect
+        x={ROD_X - 4}
+        y={foot - 2 * half - 1.5}
+        width={ROD_WIDTH + 16}
+        height={3}
+        fill="var(--color-umber)"
+      />
+    </>
+  );
+}
+
+function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { scale: SkylineScale }) {
+  const line = (path: readonly PathPoint[]) =>
+    path
+      .map((point) => `${scale.x(point.azimuthDeg).toFixed(1)} ${scale.y(point.altitudeDeg).toFixed(1)}`)
+      .join('L');
+  const at = { x: scale.x(star.azimuthDeg), y: scale.y(star.altitudeDeg) };
+  return (
+    <>
+      {lightPath.length > 1 && (
+        <path
+          d={`M${line(lightPath)}`}
+          fill="none"
+          stroke="var(--color-indigo)"
+          strokeWidth={3.5}
+          strokeDasharray="1 8"
+          strokeLinecap="round"
+        />
+      )}
+      {seenPath.length > 1 && (
+        <path d={`M${line(seenPath)}`} fill="none" stroke="var(--color-indigo)" strokeWidth={7} />
+      )}
+      {stop && (
+        <rect
+          x={scale.x(stop.azimuthDeg) - 20}
+          y={scale.y(stop.altitudeDeg) - 3}
+          width={40}
+          height={6}
+          fill="var(--color-rust)"
+        />
+      )}
+      <path
+        d={STAR}
+        transform={`translate(${String(at.x)} ${String(at.y)})`}
+        fill="var(--color-indigo)"
+        stroke="var(--color-chalk)"
+        strokeWidth={2.5}
+        paintOrder="stroke"
+      />
+    </>
+  );
+}
+
+/** Four long rays, four short: the same star as the drawn sign. */
+const STAR =
+  'M0-13 2.6-4.2 9.2-9.2 4.2-2.6 13 0 4.2 2.6 9.2 9.2 2.6 4.2 0 13-2.6 4.2-9.2 9.2-4.2 2.6-13 0-4.2-2.6-9.2-9.2-2.6-4.2Z';
+
+/** Words beside a point: to its right, or to its left where the edge is near. */
+function Beside({ at, scale, children }: { at: PathPoint; scale: SkylineScale; children: ReactNode }) {
+  const x = scale.x(at.azimuthDeg);
+  const top = scale.y(at.altitudeDeg) - 10;
+  const style = x > scale.width * 0.62 ? { right: scale.width - x + 28, top } : { left: x + 28, top };
+  return (
+    <span className="on-picture" style={style}>
+      {children}
+    </span>
+  );
+}
+
+/** A compass word under its mark, held inside the picture at either end. */
+function compassPlace(x: number, width: number) {
+  if (x < 60) return { left: 0 };
+  if (x > width - 60) return { right: 0 };
+  return { left: x, transform: 'translateX(-50%)' };
+}

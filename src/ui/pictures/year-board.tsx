@@ -1,0 +1,192 @@
+import type { ReactNode } from 'react';
+import { Peg } from '../pegs.js';
+import { percent, startPercent, type DaySpan } from './day-span.js';
+import { DayHandles, type HandleWords, type MovePart } from './day-handles.js';
+import { MonthLines, MonthScale, type ScaleMonth } from './month-scale.js';
+import { packBars, type PlacedBar } from './pack-bars.js';
+import { useTextWidth } from './use-text-width.js';
+import { useWidth } from './use-width.js';
+import { WindowShape, type WindowDays } from './window-bar.js';
+import { BarName, nearestDay, Pairing } from './year-board-parts.js';
+import { YearLane, type LaneSegment } from './year-lane.js';
+
+export interface BoardLane {
+  key: string;
+  name: string;
+  icon?: ReactNode;
+  segments: readonly LaneSegment[];
+  /** The lane as a sentence. */
+  label: string;
+}
+
+export interface BoardBar {
+  key: string;
+  name: string;
+  days: WindowDays;
+  kind?: 'work' | 'watch' | undefined;
+}
+
+/** The dotted line from a marker's day in its lane down to the chosen window. */
+export interface BoardPairing {
+  laneKey: string;
+  dayNumber: number;
+}
+
+export interface YearBoardProps {
+  span: DaySpan;
+  months: readonly ScaleMonth[];
+  lanes: readonly BoardLane[];
+  bars: readonly BoardBar[];
+  /** What stands beside the bars: "Work and rites". */
+  barsName: string;
+  /** The bars as a sentence. */
+  label: string;
+  today?: number | null | undefined;
+  chosen?: string | null | undefined;
+  pairing?: BoardPairing | null | undefined;
+  onChoose?: ((key: string) => void) | undefined;
+  /** Lets the chosen window be moved: the whole of it, its beginning or its end. */
+  onMove?: ((part: MovePart, days: number) => void) | undefined;
+  handleWords?: HandleWords | undefined;
+}
+
+const LANE_HEIGHT = 24;
+const LANE_PITCH = 31;
+const PEG_ROOM = 28;
+const BAR_HEIGHT = 12;
+const BAR_PITCH = 38;
+const BARS_GAP = 8;
+const LABEL_SIZE = 16;
+/** A longer name is cut; the list says it whole. */
+const LABEL_SHARE_MAX = 0.3;
+const LABEL_LEAST = 96;
+
+/** The year's strip: lanes of the stars above, windows as bars below, today's peg through all of it. */
+export function YearBoard(props: YearBoardProps) {
+  const { span, months, lanes, bars, barsName, label, today, chosen, pairing, onChoose } = props;
+  const [ref, width] = useWidth(900);
+  const textWidth = useTextWidth(LABEL_SIZE);
+  const pxPerDay = width / (span.last - span.first + 1);
+  const labelMax = Math.max(LABEL_LEAST, width * LABEL_SHARE_MAX);
+  const placed = packBars(
+    bars
+      .filter((bar) => bar.days.lastAdvised >= span.first && bar.days.earliest <= span.last)
+      .map((bar) => ({
+        key: bar.key,
+        startPx: (Math.max(bar.days.earliest, span.first) - span.first) * pxPerDay,
+        endPx: (Math.min(bar.days.lastAdvised, span.last) + 1 - span.first) * pxPerDay,
+        labelPx: Math.min(labelMax, textWidth(bar.name) + 8),
+      })),
+    width,
+  );
+  const hasPeg = today !== undefined && today !== null && today >= span.first && today <= span.last;
+  const lanesTop = hasPeg ? PEG_ROOM : 6;
+  const lanesEnd = lanesTop + lanes.length * LANE_PITCH;
+  const barsTop = lanesEnd + BARS_GAP;
+  const rows = Math.max(1, ...placed.map(({ row }) => row + 1));
+  const height = barsTop + rows * BAR_PITCH + 4;
+  const barY = (bar: PlacedBar) => barsTop + bar.row * BAR_PITCH;
+  const barOf = (key: string) => bars.find((bar) => bar.key === key);
+  const chosenPlace = placed.find(({ key }) => key === chosen);
+  const chosenBar = chosenPlace === undefined ? undefined : barOf(chosenPlace.key);
+  const pairedLane = lanes.findIndex(({ key }) => key === pairing?.laneKey);
+
+  return (
+    <div className="year-board">
+      <div />
+      <MonthScale span={span} months={months} />
+      <div className="year-board-names" aria-hidden style={{ paddingTop: lanesTop }}>
+        {lanes.map((lane) => (
+          <div key={lane.key} className="year-board-name" style={{ height: LANE_PITCH }}>
+            {lane.icon}
+            <span>{lane.name}</span>
+          </div>
+        ))}
+        <div className="text-umber-soft" style={{ paddingTop: BARS_GAP - 4 }}>
+          {barsName}
+        </div>
+      </div>
+      <div className="picture" ref={ref} style={{ height }}>
+        <MonthLines span={span} months={months} />
+        {lanes.map((lane, index) => (
+          <div key={lane.key} className="year-board-lane" style={{ top: lanesTop + index * LANE_PITCH }}>
+            <YearLane span={span} segments={lane.segments} label={lane.label} height={LANE_HEIGHT} />
+          </div>
+        ))}
+        <svg className="year-board-over" role="img" aria-label={label} width="100%" height={height}>
+          {chosenPlace && (
+            <rect
+              className="year-board-chosen"
+              x={chosenPlace.fromPx - 6}
+              y={barY(chosenPlace) - 6}
+              width={chosenPlace.toPx - chosenPlace.fromPx + 12}
+              height={BAR_PITCH + 1}
+            />
+          )}
+          {placed.map((place) => {
+            const bar = barOf(place.key);
+            return (
+              bar && (
+                <WindowShape
+                  key={place.key}
+                  span={span}
+                  days={bar.days}
+                  kind={bar.kind}
+                  y={barY(place)}
+                  height={BAR_HEIGHT}
+                />
+              )
+            );
+          })}
+          {pairing && pairedLane >= 0 && chosenPlace && chosenBar && (
+            <Pairing
+              x={percent(startPercent(pairing.dayNumber + 0.5, span))}
+              fromY={lanesTop + pairedLane * LANE_PITCH + 2}
+              toX={percent(startPercent(nearestDay(chosenBar.days, pairing.dayNumber), span))}
+              toY={barY(chosenPlace) + BAR_HEIGHT / 2}
+            />
+          )}
+          {hasPeg && (
+            <>
+              <line
+                x1={percent(startPercent(today + 0.5, span))}
+                x2={percent(startPercent(today + 0.5, span))}
+                y1={20}
+                y2={lanesEnd - (LANE_PITCH - LANE_HEIGHT)}
+                stroke="var(--color-umber)"
+                strokeWidth={3}
+              />
+              <Peg x={percent(startPercent(today + 0.5, span))} footY={PEG_ROOM} size={0.85} />
+            </>
+          )}
+        </svg>
+        {placed.map((place) => {
+          const bar = barOf(place.key);
+          return (
+            bar && (
+              <BarName
+                key={place.key}
+                name={bar.name}
+                isChosen={place.key === chosen}
+                maxWidth={labelMax}
+                style={{ left: place.labelStartPx, top: barY(place) + BAR_HEIGHT + 2 }}
+                onChoose={onChoose === undefined ? undefined : () => onChoose(place.key)}
+              />
+            )
+          );
+        })}
+        {chosenPlace && chosenBar && props.onMove && props.handleWords && (
+          <DayHandles
+            span={span}
+            days={chosenBar.days}
+            pxPerDay={pxPerDay}
+            top={barY(chosenPlace)}
+            height={BAR_HEIGHT}
+            words={props.handleWords}
+            onMove={props.onMove}
+          />
+        )}
+      </div>
+    </div>
+  );
+}
