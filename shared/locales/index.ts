@@ -4,6 +4,7 @@ import { texts as common } from './en/common.js';
 import { texts as files } from './en/files.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
+import { texts as print } from './en/print.js';
 import { texts as problems } from './en/problems.js';
 import { texts as reviews } from './en/reviews.js';
 import { texts as session } from './en/session.js';
@@ -27,6 +28,7 @@ export const en = {
   reviews,
   sheets,
   audit,
+  print,
   problems,
   sky,
   today,
