@@ -5,7 +5,7 @@ import type { DataSource } from 'typeorm';
 import { createApp, type App } from '#server/app.js';
 import { parseConfig } from '#server/config/env.js';
 import { DEMO_DOMAIN, DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
-import { seedDemo } from '#server/features/demo/demo.service.js';
+import { seedDemoVillages } from '#server/features/demo/demo.service.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { emptyTestDatabase, openTestDatabase } from './database.js';
 
@@ -80,7 +80,7 @@ export async function openTestApi(): Promise<TestApi> {
     reset: async () => {
       now = TEST_NOW;
       await emptyTestDatabase(dataSource);
-      await seedDemo(dataSource, clock);
+      await seedDemoVillages(dataSource, clock);
       api.restart();
     },
     restart: () => {
@@ -88,7 +88,7 @@ export async function openTestApi(): Promise<TestApi> {
     },
     close: () => dataSource.destroy(),
   };
-  await seedDemo(dataSource, clock);
+  await seedDemoVillages(dataSource, clock);
   return api;
 }
 

@@ -7,6 +7,7 @@ import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Clock } from '../../http/context.js';
 import { hashPassword } from '../session/passwords.service.js';
+import { seedDemoCalendar } from './demo-calendar.service.js';
 import {
   DEMO_DOMAIN,
   DEMO_PASSWORD,
@@ -17,6 +18,12 @@ import {
 
 /** Makes the demo villages where the database holds no person yet; what somebody changed in them stays. */
 export async function seedDemo(dataSource: DataSource, clock: Clock): Promise<void> {
+  await seedDemoVillages(dataSource, clock);
+  await seedDemoCalendar(dataSource, clock);
+}
+
+/** People, settings and places only. */
+export async function seedDemoVillages(dataSource: DataSource, clock: Clock): Promise<void> {
   if ((await dataSource.getRepository(PersonEntity).count()) > 0) return;
   const passwordHash = await hashPassword(DEMO_PASSWORD);
   await inTransaction(dataSource, async (manager) => {

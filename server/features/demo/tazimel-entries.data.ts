@@ -347,3 +347,34 @@ export const TAZIMEL_ENTRIES: readonly { code: string; content: EntryInput }[] =
     },
   },
 ];
+
+/** What the officer changed after 2027-1, and what Elder A-1 said to it. */
+export const SECOND_ROUND: readonly { code: string; change: Partial<EntryInput>; note: string }[] = [
+  {
+    code: 'A04',
+    change: {
+      offsets: { earliestDays: 3, bestFromDays: 10, bestToDays: 23, lastAdvisedDays: 28 },
+      otherSigns:
+        'Two of these: soil wet to a hand depth; weaver birds building; fig tree in new leaf; second rain has come',
+    },
+    note: 'Good. In the upper terraces we wait for the second rain as well.',
+  },
+  {
+    code: 'A06',
+    change: { ifLate: 'After 25 July sow pulses or fodder, in small lots; ask the agricultural office' },
+    note: '',
+  },
+  {
+    code: 'A10',
+    change: {
+      otherSigns: 'One of these: grain at milk stage; bird flocks at the stream or on the threshing floors',
+    },
+    note: 'The youth should begin at the stream side.',
+  },
+];
+
+/** Elder A-3 keeps to another star, and lets the difference stand beside the entry. */
+export const STANDING_DIFFERENCE = {
+  code: 'A04',
+  note: 'In the lower village we wait for the red star, eight or nine days after the Cluster.',
+} as const;
