@@ -2,8 +2,8 @@ import { describe, expect, it } from 'vitest';
 
 import {
   computeMarkerYear,
+  dayNumberOf,
   depthAtCrossingYear,
-  gregorianOf,
   julianOf,
   type Phenomenon,
 } from '#shared/sky/index.js';

@@ -7,7 +7,7 @@ import { JD_J2000 } from './julian-day.js';
  * changes, which keeps the function pure to its callers.
  */
 
-const MS_PER_DAY = 86_400_000;
+const SECONDS_PER_DAY = 86_400;
 /** 2000-01-01 12:00 UTC, written out because Date.UTC() moves years below 100 into the twentieth century. */
 const MS_AT_J2000 = 946_728_000_000;
 /** Shorter than any pair of changes on record (a suspension of summer time lasts weeks). */
@@ -56,7 +56,8 @@ export function assertTimeZone(timeZone: string): void {
 }
 
 function probe(timeZone: string, jdUt: number): number {
-  const instantMs = Math.round((jdUt - JD_J2000) * MS_PER_DAY + MS_AT_J2000);
+  // Whole seconds, because the formatter cuts the rest off.
+  const instantMs = Math.round((jdUt - JD_J2000) * SECONDS_PER_DAY) * 1000 + MS_AT_J2000;
   const parts: Record<string, number> = {};
   for (const part of formatterOf(timeZone).formatToParts(instantMs)) parts[part.type] = Number(part.value);
   const part = (name: string): number => parts[name] ?? 0;
@@ -68,7 +69,7 @@ function probe(timeZone: string, jdUt: number): number {
     part('minute'),
     part('second'),
   );
-  return Math.round((wallMs - instantMs) / 1000) / 86_400;
+  return (wallMs - instantMs) / 1000 / SECONDS_PER_DAY;
 }
 
 /** The last minute before a change inside (fromJd, toJd], by halving. */

@@ -1,15 +1,16 @@
-import { AstroTime, e_tilt, SiderealTime, SunPosition } from 'astronomy-engine';
+import { AstroTime, e_tilt, SiderealTime } from 'astronomy-engine';
 
 import { prepareStarFrame } from '#shared/sky/stars/star-frame.js';
 import { starIndexOf } from '#shared/sky/stars/star-table.js';
+import { sunLongitudeRad } from '#shared/sky/sun/sun-longitude.js';
 import type { SkylinePoint } from '#shared/sky/types.js';
 import { PHENOMENA, type Phenomenon, type StarOutcome } from '#shared/sky/vocabulary.js';
 
 /**
  * The oracle: a plain scan over every crossing of the year. It knows no closed form, no sidereal line and no table of
  * the Sun: each crossing of the skyline is walked to in small steps, its instant comes from the sidereal time of that
- * very day, and the Sun's depth from its right ascension and declination there. Only the star's place is shared with
- * the engine (and is held against ERFA on its own).
+ * very day, and the Sun's depth from its right ascension and declination there. Only the star's place and the Sun's exact
+ * longitude are shared with the engine (and are held against ERFA and PyEphem on their own).
  */
 export interface ScanQuestion {
   hr: number;
@@ -111,7 +112,7 @@ function hourAngles(
 /** Depth of the Sun's centre below the mathematical horizon, degrees. */
 export function sunDepthDeg(jdUt: number, latitudeDeg: number, longitudeDeg: number): number {
   const time = new AstroTime(jdUt - JD_J2000);
-  const longitude = SunPosition(time).elon * DEG;
+  const longitude = sunLongitudeRad(jdUt);
   const obliquity = e_tilt(time).tobl * DEG;
   const declination = Math.asin(Math.sin(obliquity) * Math.sin(longitude));
   const rightAscension = Math.atan2(Math.cos(obliquity) * Math.sin(longitude), Math.cos(longitude));
