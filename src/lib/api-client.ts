@@ -4,7 +4,7 @@ import { sessionState } from '#shared/contracts/session.js';
 import { ApiProblem, readProblem } from './api-problem.js';
 import { csrfToken, keepCsrfToken } from './csrf.js';
 
-type Part<K extends string, S> = S extends z.ZodType ? Record<K, z.input<S>> : Record<K, never> | object;
+type Part<K extends string, S> = S extends z.ZodType ? Record<K, z.input<S>> : object;
 
 /** What a call needs: `params`, `query` and `body` exactly where the endpoint declares them. */
 export type CallInput<E extends Endpoint> = Part<'params', E['params']> &

@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next';
+import { useWidth } from './use-width.js';
 import { classNames } from './class-names.js';
 import { Button } from './button.js';
 
@@ -32,35 +33,42 @@ export interface ProgressPegsProps {
 
 /** Progress along a row of holes: filled rounds are done, the one with a stem is "here". */
 export function ProgressPegs({ total, current, isDone, label }: ProgressPegsProps) {
-  // Beyond sixty the holes would touch on a phone; then neighbours share a hole.
-  const holes = Math.min(total, 60);
+  const [ref, width] = useWidth(320);
+  // Beyond sixty the holes would melt together on a phone; then neighbours share a hole.
+  const holes = Math.min(total, MOST_HOLES);
   const share = total / holes;
   const here = current === null ? null : Math.min(holes - 1, Math.floor(current / share));
+  const radius = Math.min(6, (width / holes) * 0.36);
   return (
-    <svg className="picture" width="100%" height={34} role="img" aria-label={label}>
-      {Array.from({ length: holes }, (_, hole) => {
-        const cx = `${String(((hole + 0.5) / holes) * 100)}%`;
-        const entries = Array.from(
-          { length: Math.max(1, Math.round((hole + 1) * share) - Math.round(hole * share)) },
-          (_each, index) => Math.round(hole * share) + index,
-        );
-        const radius = holes > 24 ? 3.5 : 6;
-        return (
+    <div className="picture" ref={ref}>
+      <svg width="100%" height={34} role="img" aria-label={label}>
+        {Array.from({ length: holes }, (_, hole) => (
           <circle
             key={hole}
-            cx={cx}
+            cx={middleOf(hole, holes)}
             cy={25}
             r={radius}
-            strokeWidth={2}
-            className={classNames('pic-hole', entries.every(isDone) && 'full')}
+            strokeWidth={radius > 4 ? 2 : 1.5}
+            className={classNames('pic-hole', entriesOf(hole, share, total).every(isDone) && 'full')}
           />
-        );
-      })}
-      {here !== null && (
-        <Peg x={`${String(((here + 0.5) / holes) * 100)}%`} footY={26} size={holes > 24 ? 0.75 : 1} />
-      )}
-    </svg>
+        ))}
+        {here !== null && <Peg x={middleOf(here, holes)} footY={26} size={radius > 4 ? 1 : 0.75} />}
+      </svg>
+    </div>
   );
+}
+
+const MOST_HOLES = 60;
+
+function middleOf(hole: number, holes: number): string {
+  return `${((hole + 0.5) / holes) * 100}%`;
+}
+
+/** What a hole stands for: one thing, or several neighbours where there are more things than holes. */
+function entriesOf(hole: number, share: number, total: number): number[] {
+  const first = Math.floor(hole * share);
+  const end = Math.min(total, Math.max(first + 1, Math.floor((hole + 1) * share)));
+  return Array.from({ length: end - first }, (_, index) => first + index);
 }
 
 /** The peg: a filled round with a short stem. `footY` is where the stem ends. */

@@ -14,6 +14,8 @@ export interface StepperProps {
   bigStep?: number | undefined;
   /** How the value reads while nobody types: `3 days`, `110°`. */
   format?: ((value: number) => string) | undefined;
+  /** How a typed text becomes a number, where it is more than digits: `44 BC`. Null for none. */
+  read?: ((typed: string) => number | null) | undefined;
   hint?: ReactNode;
   problem?: ReactNode;
   closed?: boolean | undefined;
@@ -27,6 +29,7 @@ const REPEAT_MS = 90;
 /** A number that is stepped rather than typed; typing stays possible. Holding a button goes on stepping. */
 export function Stepper(props: StepperProps) {
   const { label, value, onChange, min, max, step = 1, bigStep = step * 10, format, closed = false } = props;
+  const { read = readNumber } = props;
   const { t } = useTranslation('common');
   const ownId = useId();
   const inputId = props.id ?? ownId;
@@ -40,7 +43,7 @@ export function Stepper(props: StepperProps) {
   };
   const takeTyped = () => {
     if (typed === null) return;
-    const number = readNumber(typed);
+    const number = read(typed);
     if (number === null) setTyped(null);
     else moveTo(number);
   };

@@ -1,11 +1,16 @@
 import type { ReactNode } from 'react';
 import { classNames } from '../class-names.js';
+import {
+  fittingCompass,
+  HAND_DEG,
+  labelTops,
+  lookView,
+  type CompassWord,
+  type PathPoint,
+} from './look-layout.js';
 import { horizonAltitude, SkylinePicture, type HorizonPoint, type SkylineScale } from './skyline.js';
 
-export interface PathPoint {
-  azimuthDeg: number;
-  altitudeDeg: number;
-}
+export type { CompassWord, PathPoint } from './look-layout.js';
 
 export interface LookLabel extends PathPoint {
   key: string;
@@ -26,7 +31,7 @@ export interface LookPictureProps {
   /** Times and words beside the path: live text on top of the picture. */
   labels: readonly LookLabel[];
   /** Compass words along the foot. */
-  compass: readonly { azimuthDeg: number; words: string }[];
+  compass: readonly CompassWord[];
   /** `1 hand`, beside the rod. */
   handWords: string;
   /** Light over the skyline. */
@@ -37,41 +42,33 @@ export interface LookPictureProps {
   className?: string | undefined;
 }
 
-/** A fist at the end of a straight arm. */
-const HAND_DEG = 10;
-const GROUND_DEG = 6;
 const ROD_X = 14;
 const ROD_WIDTH = 20;
 
 /** Where to look: the skyline of the place, the star's path above it, and a rod in half hands beside it. */
 export function LookPicture(props: LookPictureProps) {
-  const { points, star, compass, labels, label, height = 210, light = true, className } = props;
+  const { points, star, compass, label, height = 210, light = true, className } = props;
   const middleDeg = star.azimuthDeg;
-  const horizonDeg = horizonAltitude(points, middleDeg);
-  // One hand is as long across as it is high: the picture never stretches the sky.
-  const highest = Math.max(
-    ...[star, ...props.seenPath, ...props.lightPath].map((point) => point.altitudeDeg),
-  );
-  const topDeg = Math.max(horizonDeg + 1.7 * HAND_DEG, highest + 2);
-  const bottomDeg = horizonDeg - GROUND_DEG;
-  const view = (width: number) => {
-    const halfTurn = (((topDeg - bottomDeg) / height) * width) / 2;
-    return { fromAzimuthDeg: middleDeg - halfTurn, toAzimuthDeg: middleDeg + halfTurn, topDeg, bottomDeg };
-  };
+  const path = [star, ...props.seenPath, ...props.lightPath];
+  const highestDeg = Math.max(...path.map((point) => point.altitudeDeg));
   return (
     <SkylinePicture
       className={classNames('look', className)}
       points={points}
-      view={view}
+      view={lookView(points, middleDeg, highestDeg, height)}
       height={height}
       label={label}
-      behind={(scale) => light && <DawnLight scale={scale} horizonDeg={horizonDeg} middleDeg={middleDeg} />}
+      behind={(scale) =>
+        light && (
+          <DawnLight scale={scale} horizonDeg={horizonAltitude(points, middleDeg)} middleDeg={middleDeg} />
+        )
+      }
       inFront={(scale) => (
         <>
-          {compass.map(({ azimuthDeg }) => (
+          {fittingCompass(compass, middleDeg, scale).map(({ azimuthDeg, x }) => (
             <rect
               key={azimuthDeg}
-              x={scale.x(azimuthDeg) - 1}
+              x={x - 1}
               y={height - 10}
               width={2.5}
               height={10}
@@ -82,29 +79,45 @@ export function LookPicture(props: LookPictureProps) {
           <Paths {...props} scale={scale} />
         </>
       )}
-      onTop={(scale) => (
-        <>
-          <span
-            className="on-picture"
-            style={{ left: ROD_X + ROD_WIDTH + 16, top: rodTickY(scale, points) - 10 }}
-          >
-            {props.handWords}
-          </span>
-          {labels.map((each) => (
-            <Beside key={each.key} at={each} scale={scale}>
-              {each.words}
-            </Beside>
-          ))}
-          <div className="under-picture">
-            {compass.map(({ azimuthDeg, words }) => (
-              <span key={azimuthDeg} style={compassPlace(scale.x(azimuthDeg), scale.width)}>
-                {words}
-              </span>
-            ))}
-          </div>
-        </>
-      )}
+      onTop={(scale) => <WordsOnTop {...props} scale={scale} />}
     />
+  );
+}
+
+/** Everything that is said stands here as live text, so that it grows with the reader's letters. */
+function WordsOnTop({
+  points,
+  star,
+  labels,
+  compass,
+  handWords,
+  scale,
+}: LookPictureProps & { scale: SkylineScale }) {
+  const tops = labelTops(labels, points, scale);
+  return (
+    <>
+      <span
+        className="on-picture"
+        style={{ left: ROD_X + ROD_WIDTH + 16, top: rodTickY(scale, points) - 10 }}
+      >
+        {handWords}
+      </span>
+      {labels.map((each, index) => {
+        const left = Math.max(...labels.map((other) => scale.x(other.azimuthDeg))) + 26;
+        return (
+          <span key={each.key} className="on-picture" style={{ left, top: tops[index] }}>
+            {each.words}
+          </span>
+        );
+      })}
+      <div className="under-picture">
+        {fittingCompass(compass, star.azimuthDeg, scale).map(({ azimuthDeg, words, left }) => (
+          <span key={azimuthDeg} style={{ left }}>
+            {words}
+          </span>
+        ))}
+      </div>
+    </>
   );
 }
 
@@ -196,9 +209,9 @@ function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { 
       )}
       {stop && (
         <rect
-          x={scale.x(stop.azimuthDeg) - 20}
+          x={scale.x(stop.azimuthDeg) - 16}
           y={scale.y(stop.altitudeDeg) - 3}
-          width={40}
+          width={32}
           height={6}
           fill="var(--color-rust)"
         />
@@ -218,22 +231,3 @@ function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { 
 /** Four long rays, four short: the same star as the drawn sign. */
 const STAR =
   'M0-13 2.6-4.2 9.2-9.2 4.2-2.6 13 0 4.2 2.6 9.2 9.2 2.6 4.2 0 13-2.6 4.2-9.2 9.2-4.2 2.6-13 0-4.2-2.6-9.2-9.2-2.6-4.2Z';
-
-/** Words beside a point: to its right, or to its left where the edge is near. */
-function Beside({ at, scale, children }: { at: PathPoint; scale: SkylineScale; children: ReactNode }) {
-  const x = scale.x(at.azimuthDeg);
-  const top = scale.y(at.altitudeDeg) - 10;
-  const style = x > scale.width * 0.62 ? { right: scale.width - x + 28, top } : { left: x + 28, top };
-  return (
-    <span className="on-picture" style={style}>
-      {children}
-    </span>
-  );
-}
-
-/** A compass word under its mark, held inside the picture at either end. */
-function compassPlace(x: number, width: number) {
-  if (x < 60) return { left: 0 };
-  if (x > width - 60) return { right: 0 };
-  return { left: x, transform: 'translateX(-50%)' };
-}

@@ -1,4 +1,5 @@
 import { classNames } from '../class-names.js';
+import { useWidth } from '../use-width.js';
 import { percent, startPercent, stretch, type DaySpan } from './day-span.js';
 
 /** A month of the scale. `lib/date-words` makes them: `months(year)`. */
@@ -9,18 +10,15 @@ export interface ScaleMonth {
   narrow: string;
 }
 
-/** Names of the months under or over a lane. One letter each where there is little room. */
-export function MonthScale({
-  span,
-  months,
-  narrow = false,
-}: {
-  span: DaySpan;
-  months: readonly ScaleMonth[];
-  narrow?: boolean | undefined;
-}) {
+/** Three letters and a little air, in pixels. */
+const SHORT_NAME_WIDTH = 38;
+
+/** Names of the months under or over a lane; one letter each where there is little room. */
+export function MonthScale({ span, months }: { span: DaySpan; months: readonly ScaleMonth[] }) {
+  const [ref, width] = useWidth(600);
+  const narrow = width / months.length < SHORT_NAME_WIDTH;
   return (
-    <div className={classNames('picture month-scale', narrow && 'short')} aria-hidden>
+    <div ref={ref} className={classNames('picture month-scale', narrow && 'short')} aria-hidden>
       {months.map((month) => {
         const place = stretch(month.dayNumber, month.dayNumber + month.days - 1, span);
         if (place === null) return null;

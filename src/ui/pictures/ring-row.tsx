@@ -1,7 +1,7 @@
 import { classNames } from '../class-names.js';
 import { Peg } from '../pegs.js';
 import { percent, startPercent, type DaySpan } from './day-span.js';
-import { useWidth } from './use-width.js';
+import { useWidth } from '../use-width.js';
 import { WindowShape, type WindowDays } from './window-bar.js';
 
 /** When a marker may show: the ends of its range and the expected day. Ends may lie outside the row, or be open. */

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { classNames } from '../class-names.js';
-import { useWidth } from './use-width.js';
+import { useWidth } from '../use-width.js';
 
 /** One point of a skyline. Azimuth 0…360° from north through east. */
 export interface HorizonPoint {

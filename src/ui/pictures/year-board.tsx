@@ -5,7 +5,7 @@ import { DayHandles, type HandleWords, type MovePart } from './day-handles.js';
 import { MonthLines, MonthScale, type ScaleMonth } from './month-scale.js';
 import { packBars, type PlacedBar } from './pack-bars.js';
 import { useTextWidth } from './use-text-width.js';
-import { useWidth } from './use-width.js';
+import { useWidth } from '../use-width.js';
 import { WindowShape, type WindowDays } from './window-bar.js';
 import { BarName, nearestDay, Pairing } from './year-board-parts.js';
 import { YearLane, type LaneSegment } from './year-lane.js';

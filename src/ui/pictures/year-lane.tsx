@@ -51,13 +51,13 @@ export function YearLane({ span, segments, label, height = 48, today, className 
   return (
     <div className={classNames('picture', className)}>
       <svg role="img" aria-label={label} width="100%" height={top + height}>
-        <g transform={`translate(0 ${String(top)})`}>
+        <svg y={top} width="100%" height={height} className="lane-svg">
           <rect className="pic-dusk-edge" width="100%" height={EDGE} />
           {inOrder.map((segment) => (
             <Stretch key={segment.fromDayNumber} segment={segment} span={span} height={height} />
           ))}
           <rect className="pic-foot" y={height - FOOT} width="100%" height={FOOT} />
-        </g>
+        </svg>
         {hasPeg && <LanePeg at={percent(startPercent(today + 0.5, span))} footY={top + height} />}
       </svg>
     </div>
@@ -71,31 +71,26 @@ function nights(segment: LaneSegment): number {
 function Stretch({ segment, span, height }: { segment: LaneSegment; span: DaySpan; height: number }) {
   const place = stretch(segment.fromDayNumber, segment.toDayNumber, span);
   if (place === null) return null;
-  const isFirst = segment.fromDayNumber <= span.first;
+  // The gap stands before every state but the first; a short last one is held inside the picture.
+  const gap = segment.fromDayNumber <= span.first ? 0 : GAP;
   const style = {
-    width: `max(${String(LEAST_WIDTH)}px, calc(${percent(place.width)} - ${String(isFirst ? 0 : GAP)}px))`,
+    x: `min(calc(${percent(place.start)} + ${gap}px), calc(100% - ${LEAST_WIDTH}px))`,
+    width: `max(${LEAST_WIDTH}px, calc(${percent(place.width)} - ${gap}px))`,
   };
-  const x = isFirst ? percent(place.start) : `calc(${percent(place.start)} + ${String(GAP)}px)`;
   const night = height - FOOT;
   if (segment.state === 'hidden') {
     return (
       <>
-        <rect style={{ ...style, x }} y={EDGE} height={night - EDGE} fill="var(--ground)" />
-        <rect className="pic-hidden" style={{ ...style, x }} y={EDGE} height={night - EDGE} />
+        <rect style={style} y={EDGE} height={night - EDGE} fill="var(--ground)" />
+        <rect className="pic-hidden" style={style} y={EDGE} height={night - EDGE} />
       </>
     );
   }
   return (
     <>
-      <rect style={{ ...style, x }} y={EDGE} height={night - EDGE} fill="var(--ground)" />
+      <rect style={style} y={EDGE} height={night - EDGE} fill="var(--ground)" />
       {BANDS[segment.state].map(([from, to]) => (
-        <rect
-          key={from}
-          className="pic-seen"
-          style={{ ...style, x }}
-          y={from * night}
-          height={(to - from) * night}
-        />
+        <rect key={from} className="pic-seen" style={style} y={from * night} height={(to - from) * night} />
       ))}
     </>
   );
