@@ -12,6 +12,7 @@ import { texts as sheets } from './en/sheets.js';
 import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
 import { texts as today } from './en/today.js';
+import { texts as versions } from './en/versions.js';
 
 /**
  * English is complete and the measure for every other language: another language is a folder with the same
@@ -32,6 +33,7 @@ export const en = {
   problems,
   sky,
   today,
+  versions,
 } as const;
 
 export type Namespace = keyof typeof en;

@@ -1,0 +1,76 @@
+import { useMemo } from 'react';
+import { useTranslation } from 'react-i18next';
+import type { EntryInput, EntryWindow } from '#shared/contracts/calendars.js';
+import type { MarkerNames } from '#shared/contracts/stars.js';
+import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
+import { useDateWords } from './date-words.js';
+import { markerName } from './marker-names.js';
+
+/** Day numbers of a window, for pictures. */
+export interface WindowDayNumbers {
+  earliest: number;
+  bestFrom: number;
+  bestTo: number;
+  lastAdvised: number;
+}
+
+export function windowDayNumbers(window: EntryWindow): WindowDayNumbers {
+  return {
+    earliest: dayNumberFromIso(window.earliest),
+    bestFrom: dayNumberFromIso(window.bestFrom),
+    bestTo: dayNumberFromIso(window.bestTo),
+    lastAdvised: dayNumberFromIso(window.lastAdvised),
+  };
+}
+
+type NamesByKey = ReadonlyMap<string, Pick<MarkerNames, 'name' | 'designation' | 'hr'>>;
+
+/** What is said about an entry wherever it is shown. Needs the texts `calendars` and `sky`. */
+export interface EntryWords {
+  /** `best 14 to 30 June`, `watch 5 December to 28 February`, `on 5 July`. */
+  window: (content: Pick<EntryInput, 'protectiveWatch'>, window: EntryWindow | null, year: number) => string;
+  /** The four days as a sentence. */
+  windowSentence: (window: EntryWindow) => string;
+  /** `Goes by Pleiades: first morning seen`. */
+  lead: (content: Pick<EntryInput, 'lead'>, markers: NamesByKey) => string;
+}
+
+/** Year that stands for any in "5 July": a day of every year has no 29 February. */
+const ANY_YEAR = 2027;
+
+export function useEntryWords(): EntryWords {
+  const { t } = useTranslation(['calendars', 'sky']);
+  const dates = useDateWords();
+  return useMemo(
+    () => ({
+      window: ({ protectiveWatch }, window, year) => {
+        if (window === null) return t('days.none', { year });
+        const { earliest, bestFrom, bestTo, lastAdvised } = window;
+        if (earliest === lastAdvised) return t('days.fixed', { day: dates.day(earliest) });
+        if (protectiveWatch) return t('days.watch', { range: dates.range(earliest, lastAdvised) });
+        if (bestFrom === bestTo) return t('days.bestDay', { day: dates.day(bestFrom) });
+        return t('days.best', { range: dates.range(bestFrom, bestTo) });
+      },
+      windowSentence: (window) =>
+        t('days.sentence', {
+          earliest: dates.day(window.earliest),
+          bestFrom: dates.day(window.bestFrom),
+          bestTo: dates.day(window.bestTo),
+          lastAdvised: dates.day(window.lastAdvised),
+        }),
+      lead: ({ lead }, markers) => {
+        if (lead.type === 'fixed-date') {
+          const day = dates.day({ year: ANY_YEAR, ...lead.date });
+          return t('lead.fixed', { day, source: lead.source });
+        }
+        if (lead.markerKey === '') return t('lead.none');
+        const names = markers.get(lead.markerKey);
+        return t(lead.occurrence === 2 ? 'lead.markerSecond' : 'lead.marker', {
+          marker: names ? markerName(names) : lead.markerKey,
+          phenomenon: t(`sky:phenomenon.${lead.phenomenon}`),
+        });
+      },
+    }),
+    [t, dates],
+  );
+}
