@@ -1,9 +1,9 @@
-type Library = typeof import('geo-tz/all');
+import type * as Library from 'geo-tz/all';
 
 /** Zones of the open sea: offsets by longitude, which nobody on land keeps. */
 const SEA = 'Etc/';
 
-let library: Promise<Library> | null = null;
+let library: Promise<typeof Library> | null = null;
 
 /**
  * The IANA zone that people at a point keep, from the outlines of all zones. At sea the zone by longitude; null

@@ -1,8 +1,10 @@
+import type { MarkerRow } from '#shared/contracts/stars.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { computeSkyYear, yearStrip, type MarkerYear, type StripSegment } from '#shared/sky/index.js';
 import { setImmediate } from 'node:timers/promises';
 import { settingsOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { ALL_MARKER_KEYS } from './marker-names.service.js';
+import { toMarkerRow } from './stars.mapper.js';
 
 /** A marker's year and what it does night by night. */
 export interface MarkerNights {
@@ -10,23 +12,23 @@ export interface MarkerNights {
   strip: StripSegment[];
 }
 
-/** Whole tables that are kept, about 4 MB each: a village office looks at one place and a few years. */
-const KEPT_TABLES = 6;
+/** Whole tables that are kept, about 3 MB each: a village office looks at one place and a few years. */
+const KEPT_TABLES = 8;
 /** Places and years of which single markers are kept. */
 const KEPT_PLACE_YEARS = 32;
 /** Markers between which other requests get their turn: some ten milliseconds of work. */
-const MARKERS_AT_A_TIME = 24;
+const MARKERS_AT_A_TIME = 16;
 
 /**
  * Years of markers at places, each computed once while the place stays as it is. Kept under everything that a
  * date rests on, so a changed skyline never meets an old date and an unsaved place needs no rule of its own.
  */
 export class SkyYearsService {
-  private readonly tables = new Map<string, Promise<MarkerNights[]>>();
+  private readonly tables = new Map<string, Promise<MarkerRow[]>>();
   private readonly placeYears = new Map<string, Map<string, MarkerYear>>();
 
   /** Every marker of the table; who asks meanwhile waits for the same computation. */
-  async table(place: WatchedPlace, year: number): Promise<MarkerNights[]> {
+  async table(place: WatchedPlace, year: number): Promise<MarkerRow[]> {
     const key = keyOf(place, year);
     const table = this.tables.get(key) ?? computeTable(place, year);
     keep(this.tables, key, table, KEPT_TABLES);
@@ -57,14 +59,14 @@ export class SkyYearsService {
   }
 }
 
-async function computeTable(place: WatchedPlace, year: number): Promise<MarkerNights[]> {
+async function computeTable(place: WatchedPlace, year: number): Promise<MarkerRow[]> {
   const site = siteOf(place);
   const settings = settingsOf(place);
-  const rows: MarkerNights[] = [];
+  const rows: MarkerRow[] = [];
   for (let start = 0; start < ALL_MARKER_KEYS.length; start += MARKERS_AT_A_TIME) {
     const keys = ALL_MARKER_KEYS.slice(start, start + MARKERS_AT_A_TIME);
     for (const markerYear of computeSkyYear(keys, site, settings, year)) {
-      rows.push({ markerYear, strip: yearStrip(markerYear, site, settings) });
+      rows.push(toMarkerRow({ markerYear, strip: yearStrip(markerYear, site, settings) }));
     }
     await setImmediate();
   }

@@ -1,13 +1,7 @@
-import type { MarkerDetail, MarkerRow, OccurrenceDetail } from '#shared/contracts/stars.js';
-import {
-  dayNumberOf,
-  watchTimes,
-  type MarkerYear,
-  type Occurrence,
-  type Phenomenon,
-} from '#shared/sky/index.js';
 import type { Place } from '#shared/contracts/places.js';
-import { resolveMarker } from '#shared/sky/index.js';
+import type { MarkerDetail, MarkerRow, OccurrenceDetail } from '#shared/contracts/stars.js';
+import { dayNumberOf, resolveMarker, watchTimes } from '#shared/sky/index.js';
+import type { MarkerYear, Occurrence, Phenomenon } from '#shared/sky/index.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { PlacesService } from '../places/places.service.js';
@@ -89,8 +83,8 @@ export class StarsService {
   }
 
   private async tableOf(place: Place, year: number): Promise<StarTable> {
-    const table = await this.skyYears.table(place, year);
-    return { items: table.map(toMarkerRow), nextCursor: null, year, ...civilYearDays(year) };
+    const items = await this.skyYears.table(place, year);
+    return { items, nextCursor: null, year, ...civilYearDays(year) };
   }
 }
 
