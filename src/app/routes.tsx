@@ -25,7 +25,17 @@ export const personRoutes: readonly AppRoute[] = [
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
+  { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
+  { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
+  { path: PATTERNS.newPlace, texts: ['places', 'sky'], load: () => import('./routes/place-new.js') },
+  { path: PATTERNS.place, texts: ['places', 'sky'], load: () => import('./routes/place.js') },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  {
+    path: PATTERNS.review,
+    texts: ['reviews', 'sky'],
+    load: () => import('./routes/review.js'),
+    rail: false,
+  },
   {
     path: PATTERNS.villageRecords,
     texts: ['audit', 'people'],

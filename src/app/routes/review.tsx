@@ -1,0 +1,1 @@
+export { ReviewPage as Component } from '#src/features/reviews/components/review-page.js';

@@ -1,0 +1,70 @@
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { reviewsEndpoints, type AnswerInput } from '#shared/contracts/reviews.js';
+import { versionsEndpoints } from '#shared/contracts/versions.js';
+import { callApi } from '#src/lib/api-client.js';
+import { calendarKeys } from '#src/lib/calendar-queries.js';
+
+export interface VersionRef {
+  calendarId: string;
+  number: number;
+}
+
+const paramsOf = ({ calendarId, number }: VersionRef) => ({ calendarId, number: String(number) });
+
+/** The frozen submission. It never changes, but its state and what the person may do now does. */
+export function versionQuery(ref: VersionRef) {
+  return queryOptions({
+    queryKey: [...calendarKeys.version(ref.calendarId, ref.number), 'version'],
+    queryFn: ({ signal }) => callApi(versionsEndpoints.read, { params: paramsOf(ref), signal }),
+  });
+}
+
+/** What was said to its entries, and how far each elder is. */
+export function answersQuery(ref: VersionRef) {
+  return queryOptions({
+    queryKey: calendarKeys.answers(ref.calendarId, ref.number),
+    queryFn: ({ signal }) => callApi(reviewsEndpoints.listAnswers, { params: paramsOf(ref), signal }),
+  });
+}
+
+export function usePutAnswer(ref: VersionRef) {
+  return useMutation({
+    mutationFn: ({ entryId, ...body }: AnswerInput & { entryId: string }) =>
+      callApi(reviewsEndpoints.putAnswer, { params: { ...paramsOf(ref), entryId }, body }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+export function useTakeBackAnswer(ref: VersionRef) {
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(reviewsEndpoints.takeBackAnswer, { params: { ...paramsOf(ref), entryId } }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+export function useLetStand(ref: VersionRef) {
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(reviewsEndpoints.letStand, { params: { ...paramsOf(ref), entryId } }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+export function useSign(ref: VersionRef) {
+  return useMutation({
+    mutationFn: (role: 'elder' | 'steward') =>
+      callApi(reviewsEndpoints.sign, { params: paramsOf(ref), body: { role } }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+/** An answer changes gaps and progress; a signature can change the state and unlock a button elsewhere. */
+function useLookAgain({ calendarId }: VersionRef) {
+  const client = useQueryClient();
+  return () =>
+    Promise.all([
+      client.invalidateQueries({ queryKey: calendarKeys.one(calendarId) }),
+      client.invalidateQueries({ queryKey: ['today'] }),
+    ]);
+}

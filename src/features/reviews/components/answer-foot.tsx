@@ -1,0 +1,165 @@
+import { useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import type { Answer, AnswerWord } from '#shared/contracts/reviews.js';
+import type { Version } from '#shared/contracts/versions.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { Button } from '#src/ui/button.js';
+import { Care } from '#src/ui/surfaces.js';
+import { useToast } from '#src/ui/toast.js';
+import { useLetStand, usePutAnswer, useTakeBackAnswer } from '../api/reviews-api.js';
+import { AnswerButtons } from './answer-buttons.js';
+import type { Spokesman } from './for-whom.js';
+import { NotePanel } from './note-panel.js';
+
+interface AnswerFootProps {
+  version: Version;
+  entryId: string;
+  answer: Answer | null;
+  /** Null where the elder answers; else on whose behalf, and before whom. */
+  spokesman: (Spokesman & { name: string }) | null;
+  onMissing: (missing: { elder?: string; witness?: string }) => void;
+  onAnswered: () => void;
+}
+
+/** The four buttons in thumb reach, the note behind them, and what follows an answer. */
+export function AnswerFoot(props: AnswerFootProps) {
+  const { version, entryId, answer, spokesman, onMissing, onAnswered } = props;
+  const { t } = useTranslation(['reviews', 'common', 'problems']);
+  const words = useProblemWords();
+  const say = useToast();
+  const ref = { calendarId: version.calendarId, number: version.number };
+  const put = usePutAnswer(ref);
+  const takeBack = useTakeBackAnswer(ref);
+  const letStand = useLetStand(ref);
+  const [noteFor, setNoteFor] = useState<AnswerWord | null>(null);
+
+  if (version.state !== 'in-review') {
+    return (
+      <Care>
+        <p>{t('notInReview', { state: t(`common:state.${version.state}`) })}</p>
+      </Care>
+    );
+  }
+
+  const ready = (): boolean => {
+    if (spokesman === null) return true;
+    const elder = spokesman.elderId === '' ? t('needElder') : undefined;
+    const witness = spokesman.witness.trim() === '' ? words.field('witness-required') : undefined;
+    onMissing({ ...(elder ? { elder } : {}), ...(witness ? { witness } : {}) });
+    return elder === undefined && witness === undefined;
+  };
+  const save = async (chosen: AnswerWord, note: string): Promise<boolean> => {
+    if (!ready()) return false;
+    try {
+      await put.mutateAsync({
+        entryId,
+        answer: chosen,
+        note,
+        onBehalfOf: spokesman?.elderId ?? null,
+        witness: spokesman?.witness.trim() ?? null,
+      });
+    } catch (cause) {
+      say(words.problem(cause));
+      return false;
+    }
+    setNoteFor(null);
+    say(t('keptToast', { answer: t(`answer.${chosen}`) }), spokesman === null ? { onUndo: undo } : {});
+    onAnswered();
+    return true;
+  };
+  /** Undo brings the answer of before back, or none. */
+  const undo = () => {
+    if (answer === null) takeBack.mutate(entryId);
+    else {
+      const { answer: before, note } = answer;
+      put.mutate({ entryId, answer: before, note, onBehalfOf: null, witness: null });
+    }
+  };
+  const choose = (chosen: AnswerWord) => {
+    // "Agree" needs no words and is kept at once; the others are asked for a note, which may stay empty for two.
+    if (chosen === 'agree') void save(chosen, answer?.answer === 'agree' ? answer.note : '');
+    else if (ready()) setNoteFor(chosen);
+  };
+
+  if (noteFor !== null) {
+    return (
+      <div className="answer-foot">
+        <NotePanel
+          draftName={`answer.${version.id}.${entryId}`}
+          answer={noteFor}
+          before={answer?.note ?? ''}
+          busy={put.isPending}
+          onSave={(note) => save(noteFor, note)}
+          onClose={() => {
+            setNoteFor(null);
+          }}
+        />
+      </div>
+    );
+  }
+  return (
+    <div className="answer-foot">
+      {answer !== null && (
+        <div className="answer-said">
+          <span>
+            {spokesman === null
+              ? t('saidNow', { answer: t(`answer.${answer.answer}`) })
+              : t('saidNowFor', { name: spokesman.name, answer: t(`answer.${answer.answer}`) })}{' '}
+            {answer.note !== '' && t('yourNote', { note: answer.note })}
+          </span>
+          <span className="flex flex-wrap">
+            <Button
+              look="quiet"
+              onClick={() => {
+                setNoteFor(answer.answer);
+              }}
+            >
+              {answer.note === '' ? t('addNote') : t('changeNote')}
+            </Button>
+            {answer.mine && (
+              <Button
+                look="quiet"
+                onClick={() => {
+                  takeBack.mutate(entryId, {
+                    onSuccess: () => {
+                      say(t('takenBack'));
+                    },
+                    onError: (cause) => {
+                      say(words.problem(cause));
+                    },
+                  });
+                }}
+              >
+                {t('takeBack')}
+              </Button>
+            )}
+            {answer.mine && answer.answer === 'change-this' && !answer.letStand && (
+              <Button
+                busy={letStand.isPending}
+                onClick={() => {
+                  letStand.mutate(entryId, {
+                    onSuccess: () => {
+                      say(t('letStandDone'));
+                    },
+                    onError: (cause) => {
+                      say(words.problem(cause));
+                    },
+                  });
+                }}
+              >
+                {t('letStand')}
+              </Button>
+            )}
+          </span>
+          {answer.letStand && <span>{t('standing')}</span>}
+        </div>
+      )}
+      <AnswerButtons
+        label={spokesman?.name ? t('answersFor', { name: spokesman.name }) : t('answers')}
+        value={answer?.answer ?? null}
+        busy={put.isPending}
+        onAnswer={choose}
+      />
+    </div>
+  );
+}

@@ -1,0 +1,80 @@
+import { Trans, useTranslation } from 'react-i18next';
+import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { SignIcon } from '#src/ui/icons/drawn-icon.js';
+import { Care } from '#src/ui/surfaces.js';
+import { useEntrySentences } from '../model/entry-sentences.js';
+import { EntryDays } from './entry-days.js';
+
+/** One entry as an elder reads it: the village's words first, then when, then everything that belongs to it. */
+export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
+  const { t } = useTranslation('reviews');
+  const words = useDateWords();
+  const { content, dates } = entry;
+  const say = useEntrySentences(entry, header.markers, header.year);
+  const { window } = dates;
+  return (
+    <div className="review-entry">
+      <div className="flex items-center gap-4">
+        <SignIcon sign={content.icon} size={72} className="shrink-0" />
+        <h1 id="entry-title" tabIndex={-1} className="min-w-0">
+          {content.titleVillage !== '' && (
+            <span className="block text-umber-soft" lang={header.villageLanguage.tag}>
+              {content.titleVillage}
+            </span>
+          )}
+          <span className="block" lang={header.officerLanguage.tag}>
+            {content.titleOfficer}
+          </span>
+        </h1>
+      </div>
+      <p className="review-best">
+        {window === null ? (
+          t('noWindow')
+        ) : window.bestFrom === window.bestTo ? (
+          <Trans
+            t={t}
+            i18nKey="bestOneDay"
+            values={{ day: words.day(window.bestFrom) }}
+            components={{ d: <strong /> }}
+          />
+        ) : (
+          <Trans
+            t={t}
+            i18nKey="best"
+            values={{ range: words.range(window.bestFrom, window.bestTo) }}
+            components={{ d: <strong /> }}
+          />
+        )}
+      </p>
+      <p>{say.lead}</p>
+      {say.begins !== null && <p>{say.begins}</p>}
+      {window !== null && <EntryDays window={window} dates={dates} content={content} />}
+      {say.lastAdvised !== null && <p>{say.lastAdvised}</p>}
+      {content.protectiveWatch && <p>{t('watch')}</p>}
+      <Part title={t('signs')} text={content.otherSigns} />
+      <Part title={t('ifLate')} text={content.ifLate} />
+      <Part title={t('crop')} text={content.crop} />
+      <Part title={t('notes')} text={content.notes} />
+      {content.caution !== '' && (
+        <Care>
+          <p>{content.caution}</p>
+        </Care>
+      )}
+      <p className="text-umber-soft">
+        {content.giver !== '' && `${t('giver', { giver: content.giver })}. `}
+        {t(`level.${content.sharingLevel}`)} {content.agreedToPrint ? t('printYes') : t('printNo')}
+      </p>
+    </div>
+  );
+}
+
+function Part({ title, text }: { title: string; text: string }) {
+  if (text === '') return null;
+  return (
+    <section>
+      <h2 className="review-part">{title}</h2>
+      <p className="whitespace-pre-line">{text}</p>
+    </section>
+  );
+}

@@ -1,0 +1,42 @@
+import { useQuery } from '@tanstack/react-query';
+import { useTranslation } from 'react-i18next';
+import { useParams } from 'react-router-dom';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { Mast, Page } from '#src/ui/page.js';
+import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { answersQuery, versionQuery } from '../api/reviews-api.js';
+import { ReviewRound } from './review-round.js';
+
+/** An elder's review of a submission: one entry at a time, in large type. */
+export function ReviewPage() {
+  const { t } = useTranslation('reviews');
+  const { calendarId = '', number = '' } = useParams();
+  const ref = { calendarId, number: Number(number) };
+  const words = useProblemWords();
+  const version = useQuery(versionQuery(ref));
+  const answers = useQuery(answersQuery(ref));
+  usePageTitle(t('title', { year: version.data?.header.year ?? '' }));
+
+  if (version.data && answers.data) {
+    return <ReviewRound version={version.data} answers={answers.data} />;
+  }
+  const trouble = version.error ?? answers.error;
+  return (
+    <Page className="review">
+      <Mast title={t('title', { year: '' })} backTo={paths.version(calendarId, ref.number)} />
+      {trouble === null ? (
+        <Skeleton lines={8} />
+      ) : (
+        <TroubleNote
+          sentence={words.problem(trouble)}
+          onRetry={() => {
+            void version.refetch();
+            void answers.refetch();
+          }}
+        />
+      )}
+    </Page>
+  );
+}

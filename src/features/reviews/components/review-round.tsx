@@ -1,0 +1,159 @@
+import { ArrowLeft, ArrowRight } from 'lucide-react';
+import { useEffect, useRef, useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Link, useSearchParams } from 'react-router-dom';
+import type { Answer, ElderProgress } from '#shared/contracts/reviews.js';
+import type { Version } from '#shared/contracts/versions.js';
+import { useRoles } from '#src/lib/community.js';
+import { paths } from '#src/lib/paths.js';
+import { useSession } from '#src/lib/session.js';
+import { Button } from '#src/ui/button.js';
+import { ProgressPegs } from '#src/ui/pegs.js';
+import { Page } from '#src/ui/page.js';
+import { answersOf, nextOpen } from '../model/answers-of.js';
+import { AnswerFoot } from './answer-foot.js';
+import { EntryView } from './entry-view.js';
+import { ForWhom, type Spokesman } from './for-whom.js';
+import { OthersWords } from './others-words.js';
+import { ReviewEnd } from './review-end.js';
+
+const END = 'end';
+
+/** Goes through the entries; the address holds where one is, so that going back and a reload keep the place. */
+export function ReviewRound({
+  version,
+  answers,
+}: {
+  version: Version;
+  answers: { items: Answer[]; progress: ElderProgress[] };
+}) {
+  const { t } = useTranslation('reviews');
+  const { is } = useRoles();
+  const me = useSession().person?.id ?? '';
+  const [spokesman, setSpokesman] = useState<Spokesman>({ elderId: '', witness: '' });
+  const [missing, setMissing] = useState<{ elder?: string | undefined; witness?: string | undefined }>({});
+  const speaksForSelf = is('elder');
+  const elderId = speaksForSelf ? me : spokesman.elderId;
+  const elderName = answers.progress.find((each) => each.elderId === elderId)?.elderName ?? '';
+
+  const { entries, header, calendarId, number } = version;
+  const entryIds = entries.map((entry) => entry.entryId);
+  const given = answersOf(answers.items, elderId);
+  const [search, setSearch] = useSearchParams();
+  const wanted = search.get('entry');
+  const firstOpen = nextOpen(entryIds, given, -1);
+  const found = entryIds.indexOf(wanted ?? '');
+  const index =
+    wanted === END
+      ? entries.length
+      : found >= 0
+        ? found
+        : (firstOpen ?? (wanted === null ? entries.length : 0));
+  const entry = entries[index];
+  const goTo = (next: number) => {
+    setSearch({ entry: entryIds[next] ?? END }, { replace: next !== index + 1 });
+  };
+  useFocusOnMove(index);
+
+  return (
+    <Page className="review">
+      <div className="review-head">
+        <Link to={paths.version(calendarId, number)} className="btn quiet">
+          <ArrowLeft aria-hidden size={24} className="turns" />
+          {t('leave')}
+        </Link>
+        <span className="text-umber-soft">
+          {entry ? t('entryOf', { entry: index + 1, total: entries.length }) : t('end.title')}
+        </span>
+      </div>
+      <ProgressPegs
+        total={entries.length}
+        current={entry ? index : null}
+        isDone={(each) => given.has(entryIds[each] ?? '')}
+        label={
+          entry
+            ? t('progress', { done: given.size, total: entries.length, entry: index + 1 })
+            : t('progressEnd', { done: given.size, total: entries.length })
+        }
+      />
+      {!speaksForSelf && (
+        <div className="my-3">
+          <ForWhom
+            elders={answers.progress}
+            value={spokesman}
+            onChange={(next) => {
+              setSpokesman(next);
+              setMissing({});
+            }}
+            problem={missing}
+          />
+        </div>
+      )}
+      {entry ? (
+        <>
+          <EntryView entry={entry} header={header} />
+          <div className="review-entry">
+            <OthersWords
+              answers={answers.items.filter(
+                (each) => each.entryId === entry.entryId && each.elderId !== elderId,
+              )}
+            />
+            <p className="text-umber-soft">{t('silence')}</p>
+            <div className="flex flex-wrap justify-between gap-2">
+              <Button
+                look="quiet"
+                icon={<ArrowLeft aria-hidden size={20} className="turns" />}
+                closedBecause={index === 0 ? t('entryOf', { entry: 1, total: entries.length }) : undefined}
+                onClick={() => {
+                  goTo(index - 1);
+                }}
+              >
+                {t('before')}
+              </Button>
+              <Button
+                look="quiet"
+                icon={<ArrowRight aria-hidden size={20} className="turns" />}
+                onClick={() => {
+                  goTo(index + 1);
+                }}
+              >
+                {index + 1 < entries.length ? t('next') : t('toEnd')}
+              </Button>
+            </div>
+          </div>
+          <AnswerFoot
+            key={`${entry.entryId} ${elderId}`}
+            version={version}
+            entryId={entry.entryId}
+            answer={given.get(entry.entryId) ?? null}
+            spokesman={speaksForSelf ? null : { ...spokesman, name: elderName }}
+            onMissing={setMissing}
+            onAnswered={() => {
+              const after = new Map(given).set(entry.entryId, null as never);
+              goTo(nextOpen(entryIds, after, index) ?? entries.length);
+            }}
+          />
+        </>
+      ) : (
+        <ReviewEnd
+          version={version}
+          given={given}
+          speaksForSelf={speaksForSelf}
+          onOpen={goTo}
+          firstOpen={firstOpen}
+        />
+      )}
+    </Page>
+  );
+}
+
+/** A new entry is read from its title: the focus goes there, and the page to its top. */
+function useFocusOnMove(index: number): void {
+  const before = useRef(index);
+  useEffect(() => {
+    if (before.current === index) return;
+    before.current = index;
+    window.scrollTo({ top: 0 });
+    document.getElementById('entry-title')?.focus({ preventScroll: true });
+  }, [index]);
+}
