@@ -26,7 +26,7 @@ await runScript(async () => {
     orGoOn();
     await ensureNodePackages();
     orGoOn();
-    await ensureBuilt();
+    await ensureBuilt(orGoOn);
     orGoOn();
 
     const database = isOurs(settings) ? await startKeptDatabase(settings) : undefined;

@@ -34,7 +34,7 @@ await runScript(async () => {
     if (wanted.includes('checks')) add(await runChecks(showCheck));
     orGoOn();
     const needsBuild = wanted.includes('api') || wanted.includes('e2e');
-    const built = needsBuild ? await builds() : true;
+    const built = needsBuild ? await builds(orGoOn) : true;
     orGoOn();
     const vitest = vitestParts.filter((part) => wanted.includes(part));
     if (vitest.length > 0) add(await runVitest(vitest));
@@ -71,9 +71,10 @@ async function setUp(wanted) {
 }
 
 /** A build that fails is one failure, and the other tests still have their say. */
-async function builds() {
+/** @param {() => void} orGoOn */
+async function builds(orGoOn) {
   try {
-    await ensureBuilt();
+    await ensureBuilt(orGoOn);
     return true;
   } catch (error) {
     process.stdout.write(`${error instanceof Error ? error.message : String(error)}\n`);

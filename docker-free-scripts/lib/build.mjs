@@ -19,10 +19,14 @@ const files = [
 const stampFile = path.join(projectDir, 'dist/.built-from');
 const lockFile = path.join(projectDir, '.tmp/build.lock');
 
-/** Builds server and screens into dist/ when a source has changed since the last build. */
-export async function ensureBuilt() {
+/**
+ * Builds server and screens into dist/ when a source has changed since the last build.
+ *
+ * @param {() => void} [orGoOn] throws when the waiting for another script's build shall end
+ */
+export async function ensureBuilt(orGoOn = () => undefined) {
   if (isBuilt()) return;
-  await oneAtATime(async () => {
+  await oneAtATime(orGoOn, async () => {
     if (isBuilt()) return;
     say('Building the server and the screens.');
     const stamp = sourcesStamp();
@@ -82,11 +86,13 @@ function filesBelow(folder) {
 /**
  * Two scripts may want to build at once (a test run beside `npm start`); the second waits.
  *
+ * @param {() => void} orGoOn
  * @param {() => Promise<void>} work
  */
-async function oneAtATime(work) {
+async function oneAtATime(orGoOn, work) {
   mkdirSync(path.dirname(lockFile), { recursive: true });
   for (;;) {
+    orGoOn();
     try {
       writeFileSync(lockFile, String(process.pid), { flag: 'wx' });
       break;
