@@ -12,18 +12,20 @@ export interface VersionRef {
 const paramsOf = ({ calendarId, number }: VersionRef) => ({ calendarId, number: String(number) });
 
 /** The frozen submission. It never changes, but its state and what the person may do now does. */
-export function versionQuery(ref: VersionRef) {
+export function versionQuery({ calendarId, number }: VersionRef) {
   return queryOptions({
-    queryKey: [...calendarKeys.version(ref.calendarId, ref.number), 'version'],
-    queryFn: ({ signal }) => callApi(versionsEndpoints.read, { params: paramsOf(ref), signal }),
+    queryKey: [...calendarKeys.version(calendarId, number), 'version'],
+    queryFn: ({ signal }) =>
+      callApi(versionsEndpoints.read, { params: paramsOf({ calendarId, number }), signal }),
   });
 }
 
 /** What was said to its entries, and how far each elder is. */
-export function answersQuery(ref: VersionRef) {
+export function answersQuery({ calendarId, number }: VersionRef) {
   return queryOptions({
-    queryKey: calendarKeys.answers(ref.calendarId, ref.number),
-    queryFn: ({ signal }) => callApi(reviewsEndpoints.listAnswers, { params: paramsOf(ref), signal }),
+    queryKey: calendarKeys.answers(calendarId, number),
+    queryFn: ({ signal }) =>
+      callApi(reviewsEndpoints.listAnswers, { params: paramsOf({ calendarId, number }), signal }),
   });
 }
 
