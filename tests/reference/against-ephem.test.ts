@@ -11,7 +11,7 @@ interface EphemCase {
   decDeg: number;
 }
 
-const { cases } = jsonFixture<{ cases: EphemCase[] }>('ephem-sun.json');
+const { cases } = jsonFixture('ephem-sun.json') as { cases: EphemCase[] };
 const DEG = Math.PI / 180;
 /**
  * PyEphem counts longitudes from the equinox of an older precession; the two part by 0.3–0.4 thousandths of a degree per

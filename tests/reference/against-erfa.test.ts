@@ -12,7 +12,7 @@ interface ErfaCase {
   stars: { hr: number; raDeg: number; decDeg: number }[];
 }
 
-const { cases } = jsonFixture<{ cases: ErfaCase[] }>('erfa-stars.json');
+const { cases } = jsonFixture('erfa-stars.json') as { cases: ErfaCase[] };
 const DEG = Math.PI / 180;
 
 /** The engine's precession is good to 0.003° from −1000 on and to 0.01° at its limit: a hundredth of a day at most. */

@@ -17,7 +17,7 @@ interface ReferenceCase extends DepthAtCrossingCase {
 /** Two ephemerides that differ by 0.01° may put a crossing on either side of a threshold: one day. */
 const TOLERANCE_DAYS = 1;
 
-const { cases } = jsonFixture<{ cases: ReferenceCase[] }>('reference-dates.json');
+const { cases } = jsonFixture('reference-dates.json') as { cases: ReferenceCase[] };
 
 describe('60 cases of an independent scan with ERFA and PyEphem', () => {
   it.each(cases)('$id: HR $hr at $latitudeDeg° in $year', ({ outcome, dayNumbers, ...question }) => {

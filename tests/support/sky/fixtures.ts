@@ -1,19 +1,21 @@
 import { readFileSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
 
 import { parse } from 'csv-parse/sync';
 
 /** Readers of tests/fixtures/sky; provenance is in its README. */
 
+export function fixturePath(name: string): string {
+  return fileURLToPath(new URL(`../../fixtures/sky/${name}`, import.meta.url));
+}
+
 function textOf(name: string): string {
-  return readFileSync(new URL(`../../fixtures/sky/${name}`, import.meta.url), 'utf8');
+  return readFileSync(fixturePath(name), 'utf8');
 }
 
-export function fixturePath(name: string): URL {
-  return new URL(`../../fixtures/sky/${name}`, import.meta.url);
-}
-
-export function jsonFixture<Shape>(name: string): Shape {
-  return JSON.parse(textOf(name)) as Shape;
+/** The caller says what is in the file. */
+export function jsonFixture(name: string): unknown {
+  return JSON.parse(textOf(name));
 }
 
 export function csvFixture(name: string): Record<string, string>[] {

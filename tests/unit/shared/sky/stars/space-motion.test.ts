@@ -1,9 +1,13 @@
 import { describe, expect, it } from 'vitest';
 
-import { STAR_ROWS } from '#shared/sky/data/star-rows.js';
+import { STAR_ROWS, type StarRow } from '#shared/sky/data/star-rows.js';
 import { movedDirection, spaceMotionOf } from '#shared/sky/stars/space-motion.js';
 
-const rowOf = (hr: number) => STAR_ROWS.find((row) => row[0] === hr) ?? STAR_ROWS[0]!;
+function rowOf(hr: number): StarRow {
+  const row = STAR_ROWS.find(([candidate]) => candidate === hr);
+  if (!row) throw new Error(`no star ${hr}`);
+  return row;
+}
 
 describe('space motion', () => {
   it('carries Arcturus 1.9° and Sirius 1.1° in 3000 years', () => {
