@@ -23,6 +23,8 @@ import { PlacesService } from './features/places/places.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
+import { sheetsRoutes } from './features/sheets/sheets.routes.js';
+import { SheetsService } from './features/sheets/sheets.service.js';
 import { SkyYearsService } from './features/stars/sky-years.service.js';
 import { SkylineEffectsService } from './features/stars/skyline-effects.service.js';
 import { starsRoutes } from './features/stars/stars.routes.js';
@@ -106,7 +108,7 @@ export function createApp(options: AppOptions): App {
   placesRoutes(mount, places);
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
 
-  const sky = new SkyDatesService();
+  const sky = new SkyDatesService(skyYears);
   const contents = new FrozenContentService(dataSource, clock, sky);
   const versions = new VersionsService(dataSource);
   const publishing = new PublishingService(dataSource, clock, contents, versions);
@@ -117,6 +119,7 @@ export function createApp(options: AppOptions): App {
     new AnswersService(dataSource, clock),
     new SigningService(dataSource, clock, versions),
   );
+  sheetsRoutes(mount, new SheetsService(contents, versions, clock));
   auditRoutes(mount, new AuditListService(dataSource));
 
   app.use(router);

@@ -20,6 +20,8 @@ export const sheetPreview = z.strictObject({
   paper: z.enum(SHEET_PAPERS),
   label: z.string().nullable(),
   fileBytes: z.number().int().nullable(),
+  /** Letters that none of the typefaces has: they would print as empty boxes. */
+  missingLetters: z.array(z.string()),
   pages: z.array(z.record(z.string(), z.unknown())),
 });
 export type SheetPreview = z.infer<typeof sheetPreview>;

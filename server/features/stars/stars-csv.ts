@@ -3,6 +3,7 @@ import type { Place } from '#shared/contracts/places.js';
 import { csvText, type CsvCell } from '#shared/kernel/csv.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import { ENGINE_VERSION, PHENOMENA, THRESHOLD_SET_FACTS, type Phenomenon } from '#shared/sky/index.js';
+import { fileNameOf } from '../../print/file-name.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
 
 /** Spreadsheets read Greek letters and village names rightly only after this mark. */
@@ -32,7 +33,7 @@ export function starsCsv(place: Place, table: Table): { text: string; fileName: 
     place: place.name,
     year: table.year,
   });
-  return { text: UTF8_MARK + csvText(rows), fileName: `${safeFileName(name)}.csv` };
+  return { text: UTF8_MARK + csvText(rows), fileName: fileNameOf(name, 'csv') };
 }
 
 function columnsOf(place: Place, { year }: Table): Column[] {
@@ -110,9 +111,4 @@ function basis(t: Translate, place: Place): string {
     oppositeSideShiftDeg,
     skylineRule: t(`skylineRule.${skyline.length === 0 ? 'flat' : skylineRule}`),
   });
-}
-
-/** Without what some file system does not take in a name. */
-function safeFileName(name: string): string {
-  return name.replace(/[\\/:*?"<>|\u0000-\u001f]/gu, '-').trim();
 }

@@ -43,6 +43,30 @@ export const texts = {
     basis: 'basis',
     caution: 'caution',
   },
+  sheet: {
+    fileName: {
+      'month-cards': '{{community}} {{issue}} month cards',
+      'year-board': '{{community}} {{issue}} year board',
+    },
+    returns: '{{name}} returns',
+    leaves: '{{name}} leaves',
+    shows: '{{name}}: {{phenomenon}}',
+    basis: 'Dates: {{rule}}, air of each month, {{skyline}}, engine {{engineVersion}}.',
+    rule: {
+      'three-class': 'three-class rule',
+      'linear-magnitude': 'rule by brightness',
+      'azimuth-difference': 'rule by direction',
+    },
+    skyline: { hills: 'this skyline', flat: 'flat horizon' },
+    noDate: {
+      'never-sets': 'the star never sets here, so it has no first or last day.',
+      'never-clears-skyline': 'the star never clears the skyline here.',
+      'never-dark-enough': 'the nights are too light for it.',
+      'none-in-this-year': 'its star has no such day in {{year}}.',
+      'one-occurrence-only': 'its star has this day only once in {{year}}.',
+      closed: 'the last advised date, {{date}} ({{source}}), comes before its best days.',
+    },
+  },
   basis:
     'Dawnpeg, engine {{engineVersion}}; eye-and-air rule: {{rule}}; shifts {{sameSideShiftDeg}}° and {{oppositeSideShiftDeg}}°; skyline rule: {{skylineRule}}; star data: Bright Star Catalogue, 5th revised edition.',
   skylineRule: {

@@ -1,0 +1,88 @@
+import type { EntryInput } from '#shared/contracts/calendars.js';
+import type { VersionEntryBody } from '#shared/contracts/versions.js';
+import type { SheetEntry } from '#shared/sheet/sheet-model.js';
+import type { SheetWords } from '#shared/sheet/sheet-words.js';
+import type { Translate } from '../../print/translator.js';
+import { whyNoDate } from './why-no-date.js';
+
+/** A belief is printed only where its giver was asked and agreed; everything else of a calendar is for the wall. */
+export function mayBePrinted({ kind, agreedToPrint }: EntryInput): boolean {
+  return kind !== 'belief' || agreedToPrint;
+}
+
+export interface EntryTexts {
+  files: Translate;
+  words: SheetWords;
+}
+
+/**
+ * The entries as they stand on the board. They are counted anew, so that the numbers say nothing about entries
+ * that are not there.
+ */
+export function toSheetEntries(
+  bodies: readonly VersionEntryBody[],
+  year: number,
+  texts: EntryTexts,
+): SheetEntry[] {
+  return bodies
+    .filter(({ content }) => needsALine(content))
+    .map(({ content, dates }, index) => ({
+      number: index + 1,
+      icon: content.icon,
+      titles: { village: content.titleVillage, officer: content.titleOfficer },
+      window: {
+        earliest: dates.window?.earliest ?? null,
+        bestFrom: dates.window?.bestFrom ?? null,
+        bestTo: dates.window?.bestTo ?? null,
+        latest: dates.window?.lastAdvised ?? null,
+      },
+      isWatch: content.protectiveWatch,
+      fixedDate: fixedDateOf({ content, dates }),
+      lastAdvised: lastAdvisedOf({ content, dates }, year),
+      signs: content.otherSigns,
+      signsNeeded: null,
+      ifLate: content.ifLate,
+      caution: content.caution,
+      whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
+    }));
+}
+
+/** What is nothing but a marker stands among the markers, unless it has more to say. */
+function needsALine({ kind, lead, otherSigns, ifLate, caution, hasLastDate }: EntryInput): boolean {
+  if (kind !== 'marker-only' || lead.type !== 'marker') return true;
+  return hasLastDate || [otherSigns, ifLate, caution].some((text) => text !== '');
+}
+
+type Body = Pick<VersionEntryBody, 'content' | 'dates'>;
+
+/** A single day gets the sign of one; a fixed date that only opens a window does not. */
+function fixedDateOf({ content, dates: { window } }: Body): string | null {
+  if (content.lead.type !== 'fixed-date' || window === null) return null;
+  return window.bestFrom === window.bestTo ? window.bestFrom : null;
+}
+
+/** The office is named where its date is the one that counts. A star may bring the last day forward, never back. */
+function lastAdvisedOf({ content, dates: { window } }: Body, year: number): SheetEntry['lastAdvised'] {
+  const { lastDate } = content;
+  if (lastDate === null) return null;
+  if (window === null) return { date: dateIn(year, lastDate.date), source: lastDate.source };
+  return {
+    date: window.lastAdvised,
+    source: window.lastAdvisedBy === 'fixed' ? lastDate.source : '',
+  };
+}
+
+function reason({ content, dates }: Body, year: number, { files, words }: EntryTexts): string | null {
+  const { lastDate } = content;
+  if (lastDate !== null && dates.warnings.includes('window-closed-by-last-date')) {
+    const date = words.day(dateIn(year, lastDate.date));
+    return files('sheet.noDate.closed', { date, source: lastDate.source });
+  }
+  return whyNoDate(dates, year, files);
+}
+
+function dateIn(year: number, { month, day }: { month: number; day: number }): string {
+  return [String(year).padStart(4, '0'), ...[month, day].map((part) => String(part).padStart(2, '0'))].join(
+    '-',
+  );
+}

@@ -1,0 +1,85 @@
+import type { SheetQuery } from '#shared/contracts/sheets.js';
+import type { VersionEntryBody, VersionHeader, VersionState } from '#shared/contracts/versions.js';
+import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
+import type { SheetModel, SheetMoon } from '#shared/sheet/sheet-model.js';
+import { civilDayOf, moonPhases } from '#shared/sky/index.js';
+import { sheetWords } from '../../print/sheet-words.js';
+import { translatorFor, type Translate } from '../../print/translator.js';
+import { mayBePrinted, toSheetEntries } from './sheet-entries.mapper.js';
+import { toSheetMarkers } from './sheet-markers.mapper.js';
+
+export interface SheetFacts {
+  header: VersionHeader;
+  entries: readonly VersionEntryBody[];
+  /** Null for the draft. */
+  state: VersionState | null;
+  label: string | null;
+  /** As they signed; empty for what nobody has signed. */
+  signerNames: readonly string[];
+  /** Civil day at the place, `YYYY-MM-DD`. */
+  printDate: string;
+}
+
+/** A version, or the draft, as everything that its printed board says. */
+export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): SheetModel {
+  const { header, state, label } = facts;
+  const { place, year } = header;
+  const language = printLanguage(header.officerLanguage.tag);
+  const files = translatorFor(language, 'files');
+  const print = translatorFor(language, 'print');
+  const words = sheetWords({ translate: print, language, year });
+  const printed = facts.entries.filter(({ content }) => mayBePrinted(content));
+  return {
+    layout,
+    paper,
+    year,
+    communityName: header.communityName,
+    placeName: place.name,
+    latitudeDeg: place.latitudeDeg,
+    label,
+    stateWatermark: state === 'published' ? null : print(`state.${state ?? 'draft'}`),
+    officerLanguage: language,
+    villageLanguage: header.villageLanguage.tag,
+    markers: toSheetMarkers(printed, header.markers, year, {
+      files,
+      sky: translatorFor(language, 'sky'),
+    }),
+    entries: toSheetEntries(printed, year, { files, words }),
+    moon: moonOf(header),
+    contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
+    basis: [basisOf(header, files)],
+    signedBy: listOf(facts.signerNames, language),
+    printDate: facts.printDate,
+    words,
+  };
+}
+
+/** The fixed words are printed in the officer's language where we have its texts, months and all, else in English. */
+function printLanguage(tag: string): string {
+  const base = tag.split('-')[0]?.toLowerCase();
+  return LANGUAGES.some((language) => language === base) ? tag : DEFAULT_LANGUAGE;
+}
+
+/** Phases on the days that the village's clock gives them. */
+function moonOf({ place, year }: VersionHeader): SheetMoon[] {
+  return moonPhases(year).flatMap(({ quarter, jdUt }) => {
+    const { gregorian } = civilDayOf(jdUt, place.timeZone, place.longitudeDeg);
+    if (gregorian.year !== year) return [];
+    const date = [gregorian.year, gregorian.month, gregorian.day].map((part) =>
+      String(part).padStart(2, '0'),
+    );
+    return [{ phase: quarter, date: date.join('-') }];
+  });
+}
+
+function basisOf({ place, engineVersion }: VersionHeader, t: Translate): string {
+  return t('sheet.basis', {
+    rule: t(`sheet.rule.${place.thresholdSet}`),
+    skyline: t(`sheet.skyline.${place.skyline.length === 0 ? 'flat' : 'hills'}`),
+    engineVersion,
+  });
+}
+
+function listOf(names: readonly string[], language: string): string {
+  return new Intl.ListFormat(language, { type: 'conjunction' }).format([...new Set(names)]);
+}

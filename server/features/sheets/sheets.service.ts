@@ -1,0 +1,77 @@
+import type { SheetPreview, SheetQuery } from '#shared/contracts/sheets.js';
+import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
+import type { SheetModel } from '#shared/sheet/sheet-model.js';
+import type { Actor } from '../../http/actor.js';
+import type { Clock } from '../../http/context.js';
+import { fileNameOf } from '../../print/file-name.js';
+import { layoutSheetForServer, pdfAbout, unprintableLetters } from '../../print/sheet-pdf.js';
+import { renderPages } from '../../print/render-pages.js';
+import { translatorFor } from '../../print/translator.js';
+import { civilDateAt } from '../places/place-day.service.js';
+import type { FrozenContentService } from '../versions/frozen-content.service.js';
+import type { VersionsService } from '../versions/versions.service.js';
+import { toSheetModel } from './sheet-model.mapper.js';
+
+/** The peg sheet of whatever version the person may see; anything that is not published carries its state across. */
+export class SheetsService {
+  constructor(
+    private readonly contents: FrozenContentService,
+    private readonly versions: VersionsService,
+    private readonly clock: Clock,
+  ) {}
+
+  async pdf(
+    actor: Actor,
+    calendarId: string,
+    number: string,
+    query: SheetQuery,
+  ): Promise<{ content: Buffer; fileName: string }> {
+    const model = await this.model(actor, calendarId, number, query);
+    const content = await renderPages(layoutSheetForServer(model), pdfAbout(model));
+    return { content, fileName: sheetFileName(model) };
+  }
+
+  /** The same pages for the screen, with the size of the file and the letters that no typeface of ours has. */
+  async preview(actor: Actor, calendarId: string, number: string, query: SheetQuery): Promise<SheetPreview> {
+    const model = await this.model(actor, calendarId, number, query);
+    const pages = layoutSheetForServer(model);
+    return {
+      layout: model.layout,
+      paper: model.paper,
+      label: model.label,
+      fileBytes: (await renderPages(pages, pdfAbout(model))).length,
+      missingLetters: unprintableLetters(pages),
+      pages: pages.map((page) => ({ ...page })),
+    };
+  }
+
+  private async model(
+    actor: Actor,
+    calendarId: string,
+    number: string,
+    query: SheetQuery,
+  ): Promise<SheetModel> {
+    const { header, entries, state, label } = await this.contents.read(actor, calendarId, number);
+    const signatures =
+      number === 'draft' ? [] : (await this.versions.read(actor, calendarId, Number(number))).signatures;
+    return toSheetModel(
+      {
+        header,
+        entries,
+        state,
+        label,
+        signerNames: signatures.map(({ displayName }) => displayName),
+        printDate: civilDateAt(this.clock.now(), header.place),
+      },
+      query,
+    );
+  }
+}
+
+/** `Upper Tazimel 2027-1 month cards.pdf` */
+function sheetFileName(model: SheetModel): string {
+  const t = translatorFor(DEFAULT_LANGUAGE, 'files');
+  const issue = model.label ?? `${model.year} ${model.stateWatermark ?? ''}`;
+  const name = t(`sheet.fileName.${model.layout}`, { community: model.communityName, issue });
+  return fileNameOf(name, 'pdf');
+}
