@@ -25,6 +25,7 @@ export const personRoutes: readonly AppRoute[] = [
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
+  { path: PATTERNS.today, texts: ['today', 'sky'], load: () => import('./routes/today.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
   { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
   { path: PATTERNS.newPlace, texts: ['places', 'sky'], load: () => import('./routes/place-new.js') },

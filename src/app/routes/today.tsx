@@ -1,0 +1,1 @@
+export { TodayPage as Component } from '#src/features/today/components/today-page.js';

@@ -1,0 +1,137 @@
+import { useQuery } from '@tanstack/react-query';
+import { ArrowRight } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import type { Today, WaitingItem } from '#shared/contracts/today.js';
+import { useCurrentCommunity, useCurrentPlace, useRoles } from '#src/lib/community.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { ButtonLink } from '#src/ui/button.js';
+import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
+import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { todayQuery } from '../api/today-query.js';
+import { useWaitingWords } from '../model/waiting-words.js';
+import { ComingBoard } from './coming-board.js';
+import { PegBoard } from './peg-board.js';
+import { WaitingBoard } from './waiting-board.js';
+import { WatchCard } from './watch-card.js';
+
+/** Where everybody lands: what waits for them, the peg, and what to look for. */
+export function TodayPage() {
+  const { t } = useTranslation('today');
+  const { communityId, communityName } = useCurrentCommunity();
+  const { place, isLoading } = useCurrentPlace();
+  const words = useProblemWords();
+  const dates = useDateWords();
+  const today = useQuery({ ...todayQuery(communityId, place?.id ?? null), enabled: !isLoading });
+  usePageTitle(t('title'));
+  const { data } = today;
+  return (
+    <Page>
+      <Mast
+        title={data ? dates.day(data.date, 'weekday') : t('title')}
+        under={data?.placeName ?? communityName}
+      />
+      {today.isPending && <Skeleton lines={8} />}
+      {today.error !== null && (
+        <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
+      )}
+      {data && <TodayBoards data={data} />}
+    </Page>
+  );
+}
+
+function TodayBoards({ data }: { data: Today }) {
+  const { t } = useTranslation('today');
+  const { is } = useRoles();
+  const { place } = useCurrentPlace();
+  const first = data.coming[0];
+  const waiting = <WaitingBoard items={data.waiting} />;
+  const watch = first ? (
+    <WatchCard coming={first} place={place} later={data.comingIsLater} />
+  ) : data.placeId === null ? (
+    <NoPlace />
+  ) : (
+    <EmptyState title={t('watch.none')} />
+  );
+  // Who comes with work to do meets it first; a villager meets the peg and the sky first.
+  const worksFirst = is('officer', 'elder', 'steward', 'staff') && data.waiting.length > 0;
+  return (
+    <>
+      <Columns>
+        {worksFirst ? (
+          <>
+            <div className="grid content-start gap-4">
+              {waiting}
+              <MainAction item={data.waiting[0]} />
+              <ComingBoard today={data} />
+            </div>
+            <div className="grid content-start gap-4">
+              <PegBoard today={data} />
+              {watch}
+            </div>
+          </>
+        ) : (
+          <>
+            <div className="grid content-start gap-4">
+              <PegBoard today={data} />
+              {watch}
+            </div>
+            <div className="grid content-start gap-4">
+              {waiting}
+              <ComingBoard today={data} />
+            </div>
+          </>
+        )}
+      </Columns>
+    </>
+  );
+}
+
+/** The first thing that waits is the one main action of the screen. */
+function MainAction({ item }: { item: WaitingItem | undefined }) {
+  const { t } = useTranslation('today');
+  const wordsOf = useWaitingWords();
+  if (!item) return null;
+  const label = () => {
+    switch (item.kind) {
+      case 'answer-entries':
+      case 'sign-as-elder':
+        return t('action.review');
+      case 'go-on-with-draft':
+      case 'elder-asked-change':
+        return t('action.draft', { year: String(item.year) });
+      case 'print-published':
+        return t('action.sheet');
+      default:
+        return t('action.sign');
+    }
+  };
+  return (
+    <ThumbBar>
+      <ButtonLink
+        look="main"
+        to={wordsOf(item).to}
+        icon={<ArrowRight aria-hidden size={22} className="turns" />}
+      >
+        {label()}
+      </ButtonLink>
+    </ThumbBar>
+  );
+}
+
+function NoPlace() {
+  const { t } = useTranslation('today');
+  const { is } = useRoles();
+  return (
+    <EmptyState
+      title={t('noPlace')}
+      action={
+        is('officer') ? <ButtonLink to={paths.newPlace()}>{t('addPlace')}</ButtonLink> : t('askOfficer')
+      }
+    >
+      {t('noPlaceHint')}
+    </EmptyState>
+  );
+}
