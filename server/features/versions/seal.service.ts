@@ -19,7 +19,7 @@ export interface SealedVersion {
 }
 
 /** A stored version whose text and hashes do not belong together: somebody changed it past the product. */
-export class BrokenSealError extends Error {
+class BrokenSealError extends Error {
   override readonly name = 'BrokenSealError';
 }
 
