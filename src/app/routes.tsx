@@ -31,6 +31,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.newPlace, texts: ['places', 'sky'], load: () => import('./routes/place-new.js') },
   { path: PATTERNS.place, texts: ['places', 'sky'], load: () => import('./routes/place.js') },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,
     texts: ['reviews', 'sky'],

@@ -1,0 +1,1 @@
+export { SheetPreviewPage as Component } from '#src/features/sheets/components/sheet-page.js';
