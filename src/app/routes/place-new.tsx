@@ -1,0 +1,1 @@
+export { NewPlacePage as Component } from '#src/features/places/components/new-place-page.js';

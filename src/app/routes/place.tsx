@@ -1,0 +1,1 @@
+export { PlacePage as Component } from '#src/features/places/components/place-page.js';

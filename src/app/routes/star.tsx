@@ -1,0 +1,1 @@
+export { StarPage as Component } from '#src/features/stars/components/star-page.js';

@@ -1,0 +1,1 @@
+export { StarsPage as Component } from '#src/features/stars/components/stars-page.js';

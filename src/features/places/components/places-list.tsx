@@ -1,0 +1,96 @@
+import { ChevronRight, Plus } from 'lucide-react';
+import { useQuery } from '@tanstack/react-query';
+import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
+import type { Place } from '#shared/contracts/places.js';
+import { placesQuery, useCurrentCommunity, useRoles } from '#src/lib/community.js';
+import { paths } from '#src/lib/paths.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { ButtonLink } from '#src/ui/button.js';
+import { SkylinePicture } from '#src/ui/pictures/skyline.js';
+import { Board } from '#src/ui/surfaces.js';
+import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { writeCoordinate } from '../model/coordinate.js';
+import { degreesText } from '../model/degrees.js';
+import { heightScale, turnView } from '../model/skyline-edit.js';
+
+/** The watching places of the village on screen; officers add one. A part of the village's page. */
+export function PlacesList() {
+  const { t } = useTranslation('places');
+  const { communityId } = useCurrentCommunity();
+  const mayAdd = useRoles().is('officer');
+  const words = useProblemWords();
+  const { data: places, error, refetch } = useQuery(placesQuery(communityId));
+  const add = (
+    <ButtonLink to={paths.newPlace()} icon={<Plus aria-hidden size={20} />}>
+      {t('list.add')}
+    </ButtonLink>
+  );
+  if (places === undefined) {
+    return error === null ? (
+      <Board>
+        <Skeleton lines={4} />
+      </Board>
+    ) : (
+      <TroubleNote
+        sentence={words.problem(error)}
+        onRetry={() => {
+          void refetch();
+        }}
+      />
+    );
+  }
+  if (places.length === 0) {
+    return (
+      <Board>
+        <EmptyState title={t('list.none')} action={mayAdd ? add : undefined}>
+          {t('list.noneHint')} {!mayAdd && t('list.noneHintOthers')}
+        </EmptyState>
+      </Board>
+    );
+  }
+  return (
+    <div className="grid gap-4">
+      <ul className="grid gap-4 mid:grid-cols-2">
+        {places.map((place) => (
+          <li key={place.id}>
+            <PlaceCard place={place} />
+          </li>
+        ))}
+      </ul>
+      {mayAdd && <div>{add}</div>}
+    </div>
+  );
+}
+
+function PlaceCard({ place }: { place: Place }) {
+  const { t, i18n } = useTranslation('places');
+  const { topDeg, bottomDeg } = heightScale(place.skyline);
+  const highestDeg = Math.max(...place.skyline.map((point) => point.altitudeDeg));
+  return (
+    <Link to={paths.place(place.id)} className="board block text-umber no-underline hover:bg-lime-deep">
+      <span className="flex items-center justify-between gap-3">
+        <span className="own-words text-lead underline decoration-edge underline-offset-4">{place.name}</span>
+        <ChevronRight aria-hidden className="turns" size={24} />
+      </span>
+      <span className="mt-1 block text-small text-umber-soft">
+        <bdi dir="ltr">
+          {writeCoordinate(place.latitudeDeg, 'latitude')}, {writeCoordinate(place.longitudeDeg, 'longitude')}
+        </bdi>
+        <span className="block">
+          {place.skyline.length === 0
+            ? t('list.flat')
+            : t('list.highest', { degrees: degreesText(highestDeg, i18n.language) })}
+        </span>
+      </span>
+      <span aria-hidden className="mt-2 block">
+        <SkylinePicture
+          points={place.skyline}
+          view={{ ...turnView(null), topDeg, bottomDeg }}
+          height={48}
+          label=""
+        />
+      </span>
+    </Link>
+  );
+}

@@ -1,0 +1,156 @@
+import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { Link as LinkIcon } from 'lucide-react';
+import { useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import { useLocation, useParams, useSearchParams } from 'react-router-dom';
+import type { Place } from '#shared/contracts/places.js';
+import type { MarkerDetail } from '#shared/contracts/stars.js';
+import { useCurrentPlace, useRoles } from '#src/lib/community.js';
+import { todayIn } from '#src/lib/days.js';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { useSettled } from '#src/lib/settled.js';
+import { ButtonLink } from '#src/ui/button.js';
+import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
+import { Board } from '#src/ui/surfaces.js';
+import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { starQuery } from '../api/stars-queries.js';
+import { isJulian, readYear } from '../model/civil-year.js';
+import { phenomenonToTie } from '../model/tie.js';
+import { BasisBoard } from './basis-board.js';
+import { FourDays } from './four-days.js';
+import { NoPlace } from './no-place.js';
+import { useStarDates } from './star-dates.js';
+import { useStarNaming } from './star-names.js';
+import { YearBoard } from './year-board.js';
+import { YearStepper } from './year-stepper.js';
+
+/** One star or figure from the place on screen: its year, its four days, and what they rest on. */
+export function StarPage() {
+  const { t } = useTranslation('stars');
+  const { markerKey = '' } = useParams();
+  const [search] = useSearchParams();
+  const { place, places, isLoading } = useCurrentPlace();
+  const shown = places.find((each) => each.id === search.get('placeId')) ?? place;
+  if (shown !== null) {
+    return <StarAtPlace key={`${markerKey} ${shown.id}`} place={shown} markerKey={markerKey} />;
+  }
+  return (
+    <Page>
+      <Mast title={t('title')} backTo={paths.stars()} />
+      <Board>{isLoading ? <Skeleton lines={6} /> : <NoPlace />}</Board>
+    </Page>
+  );
+}
+
+const PAUSE_MS = 250;
+
+function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
+  const { t } = useTranslation('stars');
+  const words = useProblemWords();
+  const [search, setSearch] = useSearchParams();
+  const list = useListAddress(place);
+  const [year, setYear] = useState(() => readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year);
+  const settledYear = useSettled(year, PAUSE_MS);
+  const { data, error, refetch, isPlaceholderData } = useQuery({
+    ...starQuery(place.id, markerKey, settledYear),
+    placeholderData: keepPreviousData,
+  });
+  const changeYear = (next: number) => {
+    setYear(next);
+    setSearch(
+      (before) => {
+        before.set('year', String(next));
+        return before;
+      },
+      { replace: true, preventScrollReset: true },
+    );
+  };
+  if (data === undefined) {
+    return (
+      <Page>
+        <Mast title={t('title')} backTo={list} />
+        <Board>
+          {error === null ? (
+            <Skeleton lines={8} />
+          ) : (
+            <TroubleNote
+              title={t('trouble')}
+              sentence={words.problem(error)}
+              onRetry={() => {
+                void refetch();
+              }}
+            />
+          )}
+        </Board>
+      </Page>
+    );
+  }
+  return (
+    <StarScreen
+      star={data}
+      place={place}
+      list={list}
+      isLate={isPlaceholderData || settledYear !== year}
+      yearStepper={<YearStepper className="w-44" year={year} onChange={changeYear} />}
+    />
+  );
+}
+
+interface StarScreenProps {
+  star: MarkerDetail;
+  place: Place;
+  list: string;
+  isLate: boolean;
+  yearStepper: React.ReactNode;
+}
+
+function StarScreen({ star, place, list, isLate, yearStepper }: StarScreenProps) {
+  const { t } = useTranslation('stars');
+  const mayTie = useRoles().is('officer');
+  const naming = useStarNaming()(star);
+  const dates = useStarDates(star.year, star.firstDayNumber);
+  const tied = phenomenonToTie(star);
+  usePageTitle(naming.title);
+  return (
+    <Page>
+      <Mast
+        title={naming.title}
+        under={t('star.under', { designation: naming.second, place: place.name, year: dates.year })}
+        backTo={list}
+      >
+        {mayTie && tied !== null && (
+          <ThumbBar>
+            <ButtonLink
+              look="main"
+              to={paths.calendars({ marker: star.markerKey, phenomenon: tied })}
+              icon={<LinkIcon aria-hidden size={22} />}
+            >
+              {t('star.tie')}
+            </ButtonLink>
+          </ThumbBar>
+        )}
+      </Mast>
+      <div aria-busy={isLate} className={isLate ? 'opacity-60' : undefined}>
+        <YearBoard star={star} title={naming.title} dates={dates} place={place} yearStepper={yearStepper} />
+        {isJulian(star.year) && <p className="mt-3 text-small">{t('julian')}</p>}
+        <Columns wider="first" className="mt-4">
+          <FourDays star={star} dates={dates} place={place} title={naming.title} mayTie={mayTie} />
+          <BasisBoard star={star} dates={dates} placeId={place.id} />
+        </Columns>
+      </div>
+    </Page>
+  );
+}
+
+/** Back to the list as it was, where the star was opened from it. */
+function useListAddress(place: Place): string {
+  const [search] = useSearchParams();
+  const state: unknown = useLocation().state;
+  if (typeof state === 'object' && state !== null && 'list' in state && typeof state.list === 'string') {
+    return state.list;
+  }
+  const year = readYear(search.get('year') ?? '');
+  return paths.stars({ placeId: place.id, ...(year === null ? {} : { year }) });
+}

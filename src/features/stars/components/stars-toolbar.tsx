@@ -1,0 +1,171 @@
+import { Download, Search, X } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import type { Place } from '#shared/contracts/places.js';
+import { starsEndpoints } from '#shared/contracts/stars.js';
+import { apiUrl } from '#src/lib/api-client.js';
+import { ButtonAnchor } from '#src/ui/button.js';
+import { SelectField, TextField } from '#src/ui/field.js';
+import { Fold } from '#src/ui/fold.js';
+import { PickGroup } from '#src/ui/pick.js';
+import { DOES, type Does } from '../model/star-choice.js';
+import { ROWS_STEP, SORT_KEYS, type SortKey, type StarListQuery } from '../model/star-list-query.js';
+import { YearStepper } from './year-stepper.js';
+
+export interface StarsToolbarProps {
+  query: StarListQuery;
+  set: (patch: Partial<StarListQuery>) => void;
+  place: Place;
+  places: readonly Place[];
+  onPlace: (placeId: string) => void;
+  /** How many there are, once they are known. */
+  counts: { good: number; all: number } | null;
+  /** Cards have no column heads: then the order is chosen here. */
+  hasHeads: boolean;
+}
+
+/** Find, choose, step through the years, take along as CSV. */
+export function StarsToolbar(props: StarsToolbarProps) {
+  const { query, set, place, counts, hasHeads } = props;
+  const { t } = useTranslation('stars');
+  const choose = (patch: Partial<StarListQuery>) => {
+    set({ ...patch, rows: ROWS_STEP });
+  };
+  const csv = (
+    <ButtonAnchor
+      href={apiUrl(starsEndpoints.csv, { params: { placeId: place.id }, query: { year: query.year } })}
+      download
+      aria-label={t('csvLabel')}
+      icon={<Download aria-hidden size={20} />}
+    >
+      {t('csv')}
+    </ButtonAnchor>
+  );
+  return (
+    <div className="mb-4 grid gap-4">
+      <div className="flex flex-wrap items-end gap-x-3 gap-y-4">
+        <TextField
+          className="min-w-0 flex-[1_1_18rem]"
+          label={t('search')}
+          placeholder={t('searchHint')}
+          type="search"
+          enterKeyHint="search"
+          autoComplete="off"
+          leadIcon={<Search aria-hidden size={22} />}
+          value={query.search}
+          onChange={(event) => {
+            choose({ search: event.currentTarget.value });
+          }}
+          {...(query.search === ''
+            ? {}
+            : {
+                endKey: (
+                  <button
+                    type="button"
+                    className="inp-key"
+                    aria-label={t('searchClear')}
+                    onClick={() => {
+                      choose({ search: '' });
+                    }}
+                  >
+                    <X aria-hidden size={22} />
+                  </button>
+                ),
+              })}
+        />
+        <PickGroup
+          label={t('showWhich')}
+          labelForEars
+          value={query.search.trim() === '' ? query.show : null}
+          onChange={(show) => {
+            choose({ show, search: '' });
+          }}
+          options={[
+            {
+              value: 'good',
+              label: counts === null ? t('good') : t('goodCount', { count: counts.good }),
+            },
+            { value: 'all', label: counts === null ? t('allStars') : t('all', { count: counts.all }) },
+          ]}
+        />
+        <YearStepper
+          className="w-44"
+          year={query.year}
+          onChange={(year) => {
+            set({ year });
+          }}
+        />
+        {hasHeads && csv}
+      </div>
+      <Fold title={t('orderAndChoice')} line={<ChoiceLine {...props} />}>
+        <div className="grid gap-4 mid:grid-cols-3">
+          <Selects {...props} choose={choose} />
+        </div>
+        {!hasHeads && <div className="mt-4">{csv}</div>}
+      </Fold>
+    </div>
+  );
+}
+
+function ChoiceLine({ query, place, places }: StarsToolbarProps) {
+  const { t } = useTranslation('stars');
+  const parts: string[] = [t('orderLine', { order: t(`sort.${query.sort}`) })];
+  if (query.does !== 'any') parts.push(t(`does.${query.does}`));
+  if (places.length > 1) parts.push(place.name);
+  return parts.join(' · ');
+}
+
+function Selects({
+  query,
+  choose,
+  place,
+  places,
+  onPlace,
+}: StarsToolbarProps & { choose: (patch: Partial<StarListQuery>) => void }) {
+  const { t } = useTranslation(['stars', 'common']);
+  return (
+    <>
+      <SelectField
+        label={t('sortBy')}
+        value={query.sort}
+        onChange={(event) => {
+          choose({ sort: event.currentTarget.value as SortKey, descending: false });
+        }}
+      >
+        {SORT_KEYS.map((key) => (
+          <option key={key} value={key}>
+            {t(`sort.${key}`)}
+          </option>
+        ))}
+      </SelectField>
+      <SelectField
+        label={t('does.label')}
+        value={query.does}
+        onChange={(event) => {
+          const does = event.currentTarget.value as Does;
+          choose({ does, ...(does === 'any' || does === 'dated' ? {} : { show: 'all' as const }) });
+        }}
+      >
+        {DOES.map((does) => (
+          <option key={does} value={does}>
+            {t(`does.${does}`)}
+          </option>
+        ))}
+      </SelectField>
+      {places.length > 1 && (
+        <SelectField
+          label={t('common:place.choose')}
+          value={place.id}
+          onChange={(event) => {
+            onPlace(event.currentTarget.value);
+          }}
+        >
+          {places.map((each) => (
+            <option key={each.id} value={each.id}>
+              {each.name}
+            </option>
+          ))}
+        </SelectField>
+      )}
+    </>
+  );
+}

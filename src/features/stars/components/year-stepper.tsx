@@ -1,0 +1,35 @@
+import { useTranslation } from 'react-i18next';
+import { FIRST_YEAR, LAST_YEAR } from '#shared/sky/vocabulary.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { Stepper } from '#src/ui/stepper.js';
+import { readYear } from '../model/civil-year.js';
+
+/** Any year that the engine offers: stepped, or typed as people write it, `2027` or `44 BC`. */
+export function YearStepper({
+  year,
+  onChange,
+  hint,
+  className,
+}: {
+  year: number;
+  onChange: (year: number) => void;
+  hint?: string | undefined;
+  className?: string | undefined;
+}) {
+  const { t } = useTranslation('stars');
+  const words = useDateWords();
+  return (
+    <Stepper
+      className={className}
+      label={t('year')}
+      hint={hint}
+      value={year}
+      min={FIRST_YEAR}
+      max={LAST_YEAR}
+      bigStep={100}
+      format={words.year}
+      read={readYear}
+      onChange={onChange}
+    />
+  );
+}
