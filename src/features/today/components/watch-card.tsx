@@ -124,7 +124,7 @@ function Picture({
         labels={labels}
         compass={Array.from({ length: 16 }, (_, index) => ({
           azimuthDeg: index * 22.5,
-          word: t(`sky:compass.${compassPoint(index * 22.5)}`),
+          words: t(`sky:compass.${compassPoint(index * 22.5)}`),
         }))}
         handWords={t('today:watch.hand')}
         label={
