@@ -1,6 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 import { calendarsEndpoints } from '#shared/contracts/calendars.js';
 import { peopleEndpoints } from '#shared/contracts/people.js';
+import { reviewsEndpoints } from '#shared/contracts/reviews.js';
 import { versionsEndpoints } from '#shared/contracts/versions.js';
 import { callApi } from './api-client.js';
 
@@ -31,6 +32,24 @@ export function versionsQuery(calendarId: string) {
     queryKey: [...calendarKeys.versions(calendarId), 'list'],
     queryFn: async ({ signal }) =>
       (await callApi(versionsEndpoints.list, { params: { calendarId }, signal })).items,
+  });
+}
+
+/** One version as it was frozen, with its state and signatures. */
+export function versionQuery(calendarId: string, number: number) {
+  return queryOptions({
+    queryKey: [...calendarKeys.version(calendarId, number), 'version'],
+    queryFn: ({ signal }) =>
+      callApi(versionsEndpoints.read, { params: { calendarId, number: String(number) }, signal }),
+  });
+}
+
+/** Answers to the entries of a submission; for officers, elders and stewards. */
+export function answersQuery(calendarId: string, number: number) {
+  return queryOptions({
+    queryKey: calendarKeys.answers(calendarId, number),
+    queryFn: ({ signal }) =>
+      callApi(reviewsEndpoints.listAnswers, { params: { calendarId, number: String(number) }, signal }),
   });
 }
 

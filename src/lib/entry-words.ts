@@ -23,7 +23,7 @@ export function windowDayNumbers(window: EntryWindow): WindowDayNumbers {
   };
 }
 
-type NamesByKey = ReadonlyMap<string, Pick<MarkerNames, 'name' | 'designation' | 'hr'>>;
+export type NamesByKey = ReadonlyMap<string, Pick<MarkerNames, 'name' | 'designation' | 'hr'>>;
 
 /** What is said about an entry wherever it is shown. Needs the texts `calendars` and `sky`. */
 export interface EntryWords {

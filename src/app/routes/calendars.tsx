@@ -1,0 +1,1 @@
+export { CalendarsPage as Component } from '#src/features/calendars/components/calendars-page.js';

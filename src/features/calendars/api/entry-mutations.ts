@@ -1,0 +1,127 @@
+import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { calendarsEndpoints, type Entry, type EntryInput } from '#shared/contracts/calendars.js';
+import { versionsEndpoints } from '#shared/contracts/versions.js';
+import { callApi } from '#src/lib/api-client.js';
+import { calendarKeys } from '#src/lib/calendar-queries.js';
+import { entriesQuery } from './calendars-queries.js';
+
+/** Shows an answer at once; then everything of the calendar looks again, because other entries may be told more. */
+function useEntriesChanged(calendarId: string) {
+  const client = useQueryClient();
+  return {
+    client,
+    show: (change: (entries: readonly Entry[]) => Entry[]) => {
+      client.setQueryData(entriesQuery(calendarId).queryKey, (entries) => entries && change(entries));
+      void lookAgain(client, calendarId);
+    },
+  };
+}
+
+function lookAgain(client: QueryClient, calendarId: string): Promise<void> {
+  void client.invalidateQueries({ queryKey: [...calendarKeys.all, 'list'] });
+  return client.invalidateQueries({ queryKey: calendarKeys.one(calendarId) });
+}
+
+/** Takes over an entry that somebody else saved meanwhile. */
+export function useTakeEntry(calendarId: string): (entry: Entry) => void {
+  const { show } = useEntriesChanged(calendarId);
+  return (entry) => {
+    show((entries) => entries.map((each) => (each.id === entry.id ? entry : each)));
+  };
+}
+
+export function useAddEntry(calendarId: string) {
+  const { show } = useEntriesChanged(calendarId);
+  return useMutation({
+    mutationFn: (content: EntryInput) =>
+      callApi(calendarsEndpoints.addEntry, { params: { calendarId }, body: content }),
+    onSuccess: (added) => {
+      show((entries) => [...entries, added]);
+    },
+  });
+}
+
+export function useUpdateEntry(calendarId: string) {
+  const { show } = useEntriesChanged(calendarId);
+  return useMutation({
+    mutationFn: ({ entryId, ...body }: { entryId: string; content: EntryInput; version: number }) =>
+      callApi(calendarsEndpoints.updateEntry, { params: { calendarId, entryId }, body }),
+    onSuccess: (saved) => {
+      show((entries) => entries.map((each) => (each.id === saved.id ? saved : each)));
+    },
+  });
+}
+
+export function useDuplicateEntry(calendarId: string) {
+  const { show } = useEntriesChanged(calendarId);
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(calendarsEndpoints.duplicateEntry, { params: { calendarId, entryId } }),
+    onSuccess: (copy) => {
+      show((entries) => [...entries.slice(0, copy.position), copy, ...entries.slice(copy.position)]);
+    },
+  });
+}
+
+export function useDeleteEntry(calendarId: string) {
+  const { show } = useEntriesChanged(calendarId);
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(calendarsEndpoints.deleteEntry, { params: { calendarId, entryId } }),
+    onSuccess: (_, entryId) => {
+      show((entries) => entries.filter((each) => each.id !== entryId));
+    },
+  });
+}
+
+export function useRestoreEntry(calendarId: string) {
+  const { show } = useEntriesChanged(calendarId);
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(calendarsEndpoints.restoreEntry, { params: { calendarId, entryId } }),
+    onSuccess: (back) => {
+      show((entries) => [...entries.slice(0, back.position), back, ...entries.slice(back.position)]);
+    },
+  });
+}
+
+/** The new order stands on screen at once and goes back if the server refuses it. */
+export function useReorderEntries(calendarId: string) {
+  const { client } = useEntriesChanged(calendarId);
+  const { queryKey } = entriesQuery(calendarId);
+  return useMutation({
+    mutationFn: async (entryIds: readonly string[]) =>
+      (
+        await callApi(calendarsEndpoints.reorderEntries, {
+          params: { calendarId },
+          body: { entryIds: [...entryIds] },
+        })
+      ).items,
+    onMutate: async (entryIds) => {
+      await client.cancelQueries({ queryKey });
+      const before = client.getQueryData(queryKey);
+      const place = new Map(entryIds.map((id, index) => [id, index]));
+      client.setQueryData(
+        queryKey,
+        (entries) => entries && [...entries].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0)),
+      );
+      return before;
+    },
+    onError: (_, __, before) => {
+      client.setQueryData(queryKey, before);
+      void lookAgain(client, calendarId);
+    },
+    onSuccess: (entries) => {
+      client.setQueryData(queryKey, entries);
+    },
+  });
+}
+
+/** Freezes the draft and sends it to the elders. */
+export function useSubmitDraft(calendarId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: () => callApi(versionsEndpoints.submit, { params: { calendarId } }),
+    onSuccess: () => lookAgain(client, calendarId),
+  });
+}

@@ -1,0 +1,93 @@
+import {
+  entryInput,
+  type EntryInput,
+  type EntryLead,
+  type EntryOffsets,
+  type FixedLastDate,
+} from '#shared/contracts/calendars.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
+import type { Phenomenon } from '#shared/sky/vocabulary.js';
+
+type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
+type FixedLead = Extract<EntryLead, { type: 'fixed-date' }>;
+
+/**
+ * An entry while it is being written. It keeps both ways to lead it, and the last date also while the entry is not
+ * marked as having one: a change of mind loses nothing. What is saved is `contentOf(draft)`.
+ */
+export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate'> {
+  leadType: EntryLead['type'];
+  /** `markerKey` is empty until a star or figure is chosen. */
+  marker: Omit<MarkerLead, 'type'>;
+  fixed: Omit<FixedLead, 'type'>;
+  lastDate: FixedLastDate;
+}
+
+const NO_MARKER: EntryDraft['marker'] = { markerKey: '', phenomenon: 'heliacal-rising', occurrence: 1 };
+const NO_FIXED: EntryDraft['fixed'] = { date: { month: 1, day: 1 }, source: '' };
+const FIRST_OFFSETS: EntryOffsets = { earliestDays: 0, bestFromDays: 0, bestToDays: 7, lastAdvisedDays: 14 };
+
+export function draftOf(content: EntryInput): EntryDraft {
+  const { lead, lastDate, ...rest } = content;
+  return {
+    ...rest,
+    leadType: lead.type,
+    marker: lead.type === 'marker' ? withoutType(lead) : NO_MARKER,
+    fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
+    lastDate: lastDate ?? NO_FIXED,
+  };
+}
+
+/** What would be saved. It may still be incomplete; the contract's schema says where. */
+export function contentOf(draft: EntryDraft): EntryInput {
+  const { leadType, marker, fixed, lastDate, ...rest } = draft;
+  return {
+    ...rest,
+    lead: leadType === 'marker' ? { type: 'marker', ...marker } : { type: 'fixed-date', ...fixed },
+    lastDate: draft.hasLastDate ? lastDate : null,
+  };
+}
+
+/** A new entry; on the star's page a person may have chosen what it goes by. */
+export function newDraft(marker: { markerKey: string; phenomenon: Phenomenon } | null = null): EntryDraft {
+  return {
+    titleVillage: '',
+    titleOfficer: '',
+    kind: 'farm',
+    icon: 'seed',
+    crop: '',
+    notes: '',
+    caution: '',
+    leadType: 'marker',
+    marker: marker ? { ...marker, occurrence: 1 } : NO_MARKER,
+    fixed: NO_FIXED,
+    offsets: FIRST_OFFSETS,
+    hasLastDate: false,
+    lastDate: NO_FIXED,
+    protectiveWatch: false,
+    otherSigns: '',
+    ifLate: '',
+    giver: '',
+    agreedToPrint: false,
+    sharingLevel: 'village',
+  };
+}
+
+/** True where saving the draft would change what is saved. Spaces at the ends do not count. */
+export function differsFrom(draft: EntryDraft, saved: EntryInput): boolean {
+  return !sameContent(contentOf(draft), saved);
+}
+
+export function sameContent(a: EntryInput, b: EntryInput): boolean {
+  return sameJson(tidy(a), tidy(b));
+}
+
+/** Trimmed and normalised as the server will store it; untouched where it cannot be stored yet. */
+function tidy(content: EntryInput): EntryInput {
+  const parsed = entryInput.safeParse(content);
+  return parsed.success ? parsed.data : content;
+}
+
+function withoutType<T extends { type: string }>({ type: _type, ...rest }: T): Omit<T, 'type'> {
+  return rest;
+}

@@ -1,0 +1,47 @@
+import { entryInput, type EntryInput } from '#shared/contracts/calendars.js';
+import type { FieldError } from '#shared/contracts/problem.js';
+
+/** Codes of what is not accepted, by the field's path: `offsets.bestToDays` → `window-order`. One for each field. */
+export type FieldProblems = ReadonlyMap<string, { code: string; message?: string }>;
+
+export const NO_PROBLEMS: FieldProblems = new Map();
+
+/** What the contract's schema refuses; the same schema answers on the server. */
+export function problemsOf(content: EntryInput): FieldProblems {
+  const parsed = entryInput.safeParse(content);
+  const found = new Map<string, { code: string }>();
+  if (parsed.success) return found;
+  for (const { path, message } of parsed.error.issues) {
+    const field = path.map(String).join('.');
+    if (!found.has(field)) found.set(field, { code: message });
+  }
+  return found;
+}
+
+/** What the server refused. A body's fields stand below `content` where an entry is saved over an older one. */
+export function problemsFrom(errors: readonly FieldError[]): FieldProblems {
+  const found = new Map<string, { code: string; message: string }>();
+  for (const { field, code, message } of errors) {
+    const own = field.replace(/^content\./u, '');
+    if (!found.has(own)) found.set(own, { code, message });
+  }
+  return found;
+}
+
+export type FieldGroup = 'what' | 'when' | 'signs' | 'late' | 'whose';
+
+const GROUPS: Record<FieldGroup, readonly (keyof EntryInput)[]> = {
+  what: ['titleVillage', 'titleOfficer', 'kind', 'icon', 'crop', 'notes', 'caution'],
+  when: ['lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch'],
+  signs: ['otherSigns'],
+  late: ['ifLate'],
+  whose: ['giver', 'agreedToPrint', 'sharingLevel'],
+};
+
+/** The groups that must open because something in them needs another look. */
+export function groupsWithProblems(problems: FieldProblems): FieldGroup[] {
+  const fields = [...problems.keys()].map((path) => path.split('.')[0]);
+  return (Object.keys(GROUPS) as FieldGroup[]).filter((group) =>
+    GROUPS[group].some((field) => fields.includes(field)),
+  );
+}

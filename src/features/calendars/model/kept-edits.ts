@@ -1,0 +1,66 @@
+import { entryInput, type EntryInput } from '#shared/contracts/calendars.js';
+import { forget, keep, readAllKept } from '#src/lib/device-storage.js';
+import { draftPrefix } from '#src/lib/kept-draft.js';
+import { newDraft, type EntryDraft } from './entry-draft.js';
+
+/** Unsaved writing of one entry, and over which saved state of it. Both are null for a new entry. */
+export interface EntryEdit {
+  draft: EntryDraft;
+  base: EntryInput | null;
+  baseVersion: number | null;
+  keptAt: string;
+}
+
+export type Edits = ReadonlyMap<string, EntryEdit>;
+
+/** A new entry has no id yet; it goes by a word of its own until it is saved. */
+const NEW = 'new';
+
+export function isNewId(entryId: string): boolean {
+  return entryId === NEW || entryId.startsWith(`${NEW}-`);
+}
+
+export function newEntryId(word: string): string {
+  return `${NEW}-${word}`;
+}
+
+/** Each entry is kept by itself, so two windows on the same calendar do not write over each other. */
+function prefixOf(personId: string, calendarId: string): string {
+  return `${draftPrefix(personId)}entry.${calendarId}.`;
+}
+
+export function readEdits(personId: string, calendarId: string): Edits {
+  const edits = new Map<string, EntryEdit>();
+  for (const [entryId, kept] of readAllKept(prefixOf(personId, calendarId))) {
+    const edit = readEdit(kept);
+    if (edit) edits.set(entryId, edit);
+  }
+  return edits;
+}
+
+export function keepEdit(personId: string, calendarId: string, entryId: string, edit: EntryEdit): boolean {
+  return keep(prefixOf(personId, calendarId) + entryId, edit);
+}
+
+export function forgetEdit(personId: string, calendarId: string, entryId: string): void {
+  forget(prefixOf(personId, calendarId) + entryId);
+}
+
+/** What another release kept may have another shape; it is then left alone rather than half read. */
+function readEdit(kept: unknown): EntryEdit | null {
+  if (typeof kept !== 'object' || kept === null) return null;
+  const { draft, base, baseVersion, keptAt } = kept as Partial<Record<keyof EntryEdit, unknown>>;
+  if (typeof keptAt !== 'string' || !(baseVersion === null || typeof baseVersion === 'number')) return null;
+  if (!sameShape(draft, newDraft())) return null;
+  if (base !== null && !entryInput.safeParse(base).success) return null;
+  return { draft: draft as EntryDraft, base: base as EntryInput | null, baseVersion, keptAt };
+}
+
+/** The same members of the same types, all the way down. */
+function sameShape(value: unknown, pattern: unknown): boolean {
+  if (typeof pattern !== 'object' || pattern === null) return typeof value === typeof pattern;
+  if (typeof value !== 'object' || value === null) return false;
+  const members = Object.entries(pattern);
+  const own = new Map<string, unknown>(Object.entries(value));
+  return own.size === members.length && members.every(([name, member]) => sameShape(own.get(name), member));
+}

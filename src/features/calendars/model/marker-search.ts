@@ -1,0 +1,32 @@
+import type { MarkerRow } from '#shared/contracts/stars.js';
+import { textFits } from '#src/ui/combo-field.js';
+
+/** More would only be scrolled past: another letter narrows the list faster. */
+export const SHOWN_MAX = 30;
+
+/**
+ * Stars and figures that fit what was typed: by name, letter and constellation, or HR number. What the calendar goes
+ * by already comes first, then figures, then the brighter before the fainter.
+ */
+export function findMarkers(
+  rows: readonly MarkerRow[],
+  typed: string,
+  inUse: ReadonlySet<string>,
+): MarkerRow[] {
+  const wanted = typed.trim();
+  return rows
+    .filter((row) => fits(row, wanted))
+    .sort((a, b) => rank(a, inUse) - rank(b, inUse) || a.vMag - b.vMag);
+}
+
+function fits(row: MarkerRow, typed: string): boolean {
+  if (typed === '') return true;
+  const number = /^(?:hr\s*)?(\d{1,4})$/iu.exec(typed)?.[1];
+  if (number !== undefined && row.hr === Number(number)) return true;
+  return textFits(`${row.name} ${row.designation}`, typed);
+}
+
+function rank(row: MarkerRow, inUse: ReadonlySet<string>): number {
+  if (inUse.has(row.markerKey)) return 0;
+  return row.kind === 'figure' ? 1 : 2;
+}

@@ -1,0 +1,47 @@
+import { entryDatesFromDays, inOrder } from '#shared/calendar/entry-dates.js';
+import { overlappingEntryIds } from '#shared/calendar/overlap.js';
+import type { Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
+import { entryOffsets, fixedLastDate } from '#shared/contracts/calendars.js';
+import { monthDay } from '#shared/contracts/common.js';
+import type { MarkerRow } from '#shared/contracts/stars.js';
+
+/** The markers of a place and year by key. */
+export type Markers = ReadonlyMap<string, MarkerRow>;
+
+/**
+ * The dates of an entry while it is being written, by the same rules as on the server. Null while it cannot have
+ * any: no star chosen yet, days out of order, markers still on their way.
+ */
+export function previewDates(content: EntryInput, year: number, markers: Markers | null): EntryDates | null {
+  const { lead, offsets, hasLastDate, lastDate } = content;
+  if (!entryOffsets.safeParse(offsets).success) return null;
+  const timing = hasLastDate && fixedLastDate.shape.date.safeParse(lastDate?.date).success;
+  const known: EntryInput = { ...content, hasLastDate: timing };
+  if (lead.type === 'fixed-date') {
+    return monthDay.safeParse(lead.date).success ? entryDatesFromDays(known, year, null) : null;
+  }
+  const row = markers?.get(lead.markerKey);
+  return row ? entryDatesFromDays(known, year, { ...row, year }) : null;
+}
+
+export interface ShownEntry {
+  id: string;
+  /** Null for an entry that is not saved yet. */
+  saved: Entry | null;
+  content: EntryInput;
+  dates: EntryDates | null;
+  unsaved: boolean;
+}
+
+/** Adds the warning that two entries share, as the server does: it needs all of them at hand. */
+export function withOverlaps(entries: readonly ShownEntry[]): ShownEntry[] {
+  const colliding = overlappingEntryIds(
+    entries.map(({ id, content, dates }) => ({ id, timing: content, window: dates?.window ?? null })),
+  );
+  return entries.map((entry) => {
+    if (entry.dates === null) return entry;
+    const own = entry.dates.warnings.filter((warning) => warning !== 'windows-overlap');
+    const warnings = colliding.has(entry.id) ? inOrder(new Set([...own, 'windows-overlap' as const])) : own;
+    return { ...entry, dates: { ...entry.dates, warnings } };
+  });
+}

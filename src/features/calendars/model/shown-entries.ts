@@ -1,0 +1,58 @@
+import type { Entry, EntryInput } from '#shared/contracts/calendars.js';
+import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
+import { isNewId, type Edits, type EntryEdit } from './kept-edits.js';
+import { previewDates, withOverlaps, type Markers, type ShownEntry } from './preview-dates.js';
+
+interface Sources {
+  saved: readonly Entry[];
+  edits: Edits;
+  /** The entry on screen, which may be a new one that nobody wrote to yet. */
+  openId: string | null;
+  newStart: EntryDraft;
+  year: number;
+  markers: Markers | null;
+}
+
+/** The entries as they look now: what is saved, with everything over it that is written and not saved. */
+export function shownEntries({ saved, edits, openId, newStart, year, markers }: Sources): ShownEntry[] {
+  const shown = saved.map((entry): ShownEntry => {
+    const edit = edits.get(entry.id);
+    if (!edit)
+      return { id: entry.id, saved: entry, content: entry.content, dates: entry.dates, unsaved: false };
+    const content = contentOf(edit.draft);
+    return { id: entry.id, saved: entry, content, dates: datesOf(content, entry), unsaved: true };
+  });
+  const newIds = [...edits.keys()].filter(isNewId);
+  if (openId !== null && isNewId(openId) && !newIds.includes(openId)) newIds.push(openId);
+  const added = newIds.map((id): ShownEntry => {
+    const content = contentOf(edits.get(id)?.draft ?? newStart);
+    return { id, saved: null, content, dates: datesOf(content, null), unsaved: edits.has(id) };
+  });
+  return withOverlaps([...shown, ...added]);
+
+  /** While the stars are on their way, an entry that still goes by the same thing keeps its saved sign. */
+  function datesOf(content: EntryInput, entry: Entry | null) {
+    if (markers === null && content.lead.type === 'marker') return entry?.dates ?? null;
+    return previewDates(content, year, markers);
+  }
+}
+
+/** Unsaved writing to entries that somebody else took out meanwhile. */
+export function orphans(saved: readonly Entry[], edits: Edits): { id: string; edit: EntryEdit }[] {
+  const ids = new Set(saved.map(({ id }) => id));
+  return [...edits].filter(([id]) => !isNewId(id) && !ids.has(id)).map(([id, edit]) => ({ id, edit }));
+}
+
+/** True where somebody saved a newer state than the one that was written over. */
+export function isStale(entry: Entry | null, edit: EntryEdit | undefined): boolean {
+  return (
+    entry !== null && edit !== undefined && edit.baseVersion !== null && edit.baseVersion < entry.version
+  );
+}
+
+/** What the form shows for an entry. */
+export function draftFor(entry: ShownEntry, edits: Edits, newStart: EntryDraft): EntryDraft {
+  const edit = edits.get(entry.id);
+  if (edit) return edit.draft;
+  return entry.saved ? draftOf(entry.saved.content) : newStart;
+}

@@ -1,0 +1,85 @@
+import { useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import type { Calendar, Entry } from '#shared/contracts/calendars.js';
+import { answersQuery, communityQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
+import { entriesQuery, markersQuery } from '../api/calendars-queries.js';
+import { answersByEntry, type EntryAnswers } from './elder-requests.js';
+import { newDraft } from './entry-draft.js';
+import { draftFor, isStale, orphans, shownEntries } from './shown-entries.js';
+import { NO_EDITS, useEntryEdits } from './use-entry-edits.js';
+import { useSelection } from './use-selection.js';
+
+export type Editor = ReturnType<typeof useEditor>;
+
+/** Everything that the editor's screen shows: what is saved, what is written over it, what is open. */
+export function useEditor(calendar: Calendar, isOfficer: boolean) {
+  const { id, year, placeId, communityId, locked } = calendar;
+  const entries = useQuery(entriesQuery(id));
+  const markers = useQuery(markersQuery(placeId, year));
+  const community = useQuery(communityQuery(communityId));
+  const edits = useEntryEdits(id);
+  const selection = useSelection();
+  const canWrite = isOfficer && !locked;
+  // A locked draft is shown as it is saved; what was written before waits on this device.
+  const writing = canWrite ? edits.all : NO_EDITS;
+
+  const newStart = useMemo(() => newDraft(selection.wanted), [selection.wanted]);
+  const saved = useMemo(() => entries.data ?? [], [entries.data]);
+  const shown = useMemo(
+    () =>
+      shownEntries({
+        saved,
+        edits: writing,
+        openId: canWrite ? selection.openId : null,
+        newStart,
+        year,
+        markers: markers.data?.byKey ?? null,
+      }),
+    [saved, writing, canWrite, selection.openId, newStart, year, markers.data],
+  );
+  const open = shown.find((entry) => entry.id === selection.openId) ?? null;
+  const selected = open ?? (selection.isWide ? (shown[0] ?? null) : null);
+  const edit = selected ? writing.get(selected.id) : undefined;
+  const answers = useEntryAnswers(id, saved);
+
+  return {
+    calendar,
+    canWrite,
+    isOfficer,
+    entries,
+    markers,
+    community: community.data ?? null,
+    edits,
+    selection,
+    shown,
+    selected,
+    newStart,
+    draft: selected ? draftFor(selected, writing, newStart) : null,
+    stale: selected !== null && isStale(selected.saved, edit),
+    orphans: canWrite && entries.isSuccess ? orphans(saved, writing) : [],
+    answers: answers.byEntry,
+    lastNumber: answers.lastNumber,
+    unsavedIds: shown.filter((entry) => entry.unsaved).map((entry) => entry.id),
+  };
+}
+
+/** What elders said to the newest submission, by entry. */
+function useEntryAnswers(
+  calendarId: string,
+  saved: readonly Entry[],
+): { byEntry: ReadonlyMap<string, EntryAnswers>; lastNumber: number | null } {
+  const versions = useQuery(versionsQuery(calendarId));
+  const newest = versions.data?.[0] ?? null;
+  const lastNumber = newest?.number ?? null;
+  const version = useQuery({ ...versionQuery(calendarId, lastNumber ?? 0), enabled: lastNumber !== null });
+  const answers = useQuery({ ...answersQuery(calendarId, lastNumber ?? 0), enabled: lastNumber !== null });
+  const byEntry = useMemo(() => {
+    if (!version.data || !answers.data) return new Map<string, EntryAnswers>();
+    return answersByEntry(
+      version.data,
+      answers.data.items,
+      new Map(saved.map(({ id, content }) => [id, content])),
+    );
+  }, [version.data, answers.data, saved]);
+  return { byEntry, lastNumber };
+}

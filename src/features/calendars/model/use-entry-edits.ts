@@ -1,0 +1,138 @@
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import type { Entry, EntryInput } from '#shared/contracts/calendars.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
+import { useSession } from '#src/lib/session.js';
+import { contentOf, differsFrom, draftOf, sameContent, type EntryDraft } from './entry-draft.js';
+import { forgetEdit, keepEdit, readEdits, type EntryEdit, type Edits } from './kept-edits.js';
+
+const PAUSE_MS = 400;
+
+export const NO_EDITS: Edits = new Map();
+
+/** Some fields of an entry, or how they follow from what stands there now. */
+export type DraftChange = Partial<EntryDraft> | ((draft: EntryDraft) => Partial<EntryDraft>);
+
+export interface EntryEdits {
+  all: Edits;
+  /** When the writing of an entry was last kept on this device; null where it could not be. */
+  keptAt: (entryId: string) => Date | null;
+  /** Changes an entry; `from` is what it starts from: the saved entry, or how a new one begins. */
+  change: (entryId: string, from: Entry | EntryDraft, change: DraftChange) => void;
+  put: (entryId: string, edit: EntryEdit) => void;
+  /** When the person throws the writing away. */
+  drop: (entryId: string) => void;
+  /** After saving `sent`. What was written while it was on its way stays, over the state that is saved now. */
+  settle: (entryId: string, sent: EntryInput, saved: Entry) => void;
+}
+
+/**
+ * Everything that is written and not saved in one calendar, entry by entry. It is kept on this device after a short
+ * pause, and at once when the page is left, so a reload or a dead battery loses nothing.
+ */
+export function useEntryEdits(calendarId: string): EntryEdits {
+  const personId = useSession().person?.id ?? 'visitor';
+  const [all, setAll] = useState<Edits>(() => readEdits(personId, calendarId));
+  const [unkept, setUnkept] = useState<ReadonlySet<string>>(new Set());
+  // Two changes may come before the screen is drawn again; the second must see the first.
+  const newest = useRef(all);
+  const pending = useRef(new Map<string, EntryEdit>());
+  const timer = useRef<ReturnType<typeof setTimeout> | undefined>(undefined);
+
+  const flush = useCallback(() => {
+    clearTimeout(timer.current);
+    const waiting = [...pending.current];
+    pending.current.clear();
+    const lost = waiting.filter(([entryId, edit]) => !keepEdit(personId, calendarId, entryId, edit));
+    return new Set(lost.map(([entryId]) => entryId));
+  }, [personId, calendarId]);
+
+  useEffect(() => {
+    addEventListener('pagehide', flush);
+    return () => {
+      removeEventListener('pagehide', flush);
+      flush();
+    };
+  }, [flush]);
+
+  const set = useCallback((edits: Edits) => {
+    newest.current = edits;
+    setAll(edits);
+  }, []);
+
+  const put = useCallback(
+    (entryId: string, edit: EntryEdit) => {
+      set(new Map(newest.current).set(entryId, edit));
+      pending.current.set(entryId, edit);
+      clearTimeout(timer.current);
+      timer.current = setTimeout(() => {
+        setUnkept(flush());
+      }, PAUSE_MS);
+    },
+    [set, flush],
+  );
+
+  const drop = useCallback(
+    (entryId: string) => {
+      pending.current.delete(entryId);
+      forgetEdit(personId, calendarId, entryId);
+      set(new Map([...newest.current].filter(([id]) => id !== entryId)));
+    },
+    [set, personId, calendarId],
+  );
+
+  const change = useCallback(
+    (entryId: string, from: Entry | EntryDraft, changed: DraftChange) => {
+      const edit = changedEdit(newest.current.get(entryId), from, changed);
+      if (edit === null) drop(entryId);
+      else put(entryId, edit);
+    },
+    [put, drop],
+  );
+
+  const settle = useCallback(
+    (entryId: string, sent: EntryInput, saved: Entry) => {
+      const edit = newest.current.get(entryId);
+      drop(entryId);
+      if (edit && !sameContent(contentOf(edit.draft), sent)) {
+        put(saved.id, { ...edit, base: saved.content, baseVersion: saved.version });
+      }
+    },
+    [put, drop],
+  );
+
+  return useMemo(
+    () => ({
+      all,
+      keptAt: (entryId) => {
+        const edit = all.get(entryId);
+        return edit === undefined || unkept.has(entryId) ? null : new Date(edit.keptAt);
+      },
+      change,
+      put,
+      drop,
+      settle,
+    }),
+    [all, unkept, change, put, drop, settle],
+  );
+}
+
+/** The edit after a change; null where nothing is left that saving would change. */
+export function changedEdit(
+  before: EntryEdit | undefined,
+  from: Entry | EntryDraft,
+  change: DraftChange,
+  now: Date = new Date(),
+): EntryEdit | null {
+  const saved = 'content' in from ? from : null;
+  const beginning = 'content' in from ? draftOf(from.content) : from;
+  const start = before?.draft ?? beginning;
+  const draft = { ...start, ...(typeof change === 'function' ? change(start) : change) };
+  const base = before ? before.base : (saved?.content ?? null);
+  const baseVersion = before ? before.baseVersion : (saved?.version ?? null);
+  // Written back to what is saved now: nothing is unsaved any more. Over an older state it must still be decided.
+  const isBack =
+    saved === null
+      ? sameJson(draft, beginning)
+      : baseVersion === saved.version && !differsFrom(draft, saved.content);
+  return isBack ? null : { draft, base, baseVersion, keptAt: now.toISOString() };
+}

@@ -1,0 +1,114 @@
+import { useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import { entry as entrySchema, entryInput, type EntryInput } from '#shared/contracts/calendars.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
+import { ApiProblem } from '#src/lib/api-problem.js';
+import { calendarKeys } from '#src/lib/calendar-queries.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { useToast } from '#src/ui/toast.js';
+import { useAddEntry, useTakeEntry, useUpdateEntry } from '../api/entry-mutations.js';
+import { NO_PROBLEMS, problemsFrom, problemsOf, type FieldProblems } from './field-problems.js';
+import type { Editor } from './use-editor.js';
+
+/** The last try to save an entry that did not come through. */
+interface Refused {
+  entryId: string;
+  content: EntryInput;
+  server: FieldProblems;
+  overall: string | null;
+  /** Counts the tries, so that each moves the focus to its first field again. */
+  attempt: number;
+}
+
+export interface SaveEntry {
+  save: () => Promise<void>;
+  /** Saves a text that was joined from two; `version` is the saved state that it was joined over. */
+  saveJoined: (content: EntryInput, version: number) => Promise<void>;
+  isSaving: boolean;
+  problems: FieldProblems;
+  overall: string | null;
+  attempt: number;
+}
+
+export function useSaveEntry(editor: Editor): SaveEntry {
+  const { calendar, selected, edits, selection } = editor;
+  const { t } = useTranslation('calendars');
+  const say = useToast();
+  const words = useProblemWords();
+  const client = useQueryClient();
+  const takeEntry = useTakeEntry(calendar.id);
+  const add = useAddEntry(calendar.id);
+  const update = useUpdateEntry(calendar.id);
+  const [refused, setRefused] = useState<Refused | null>(null);
+
+  const refuse = (entryId: string, content: EntryInput, server: FieldProblems, overall: string | null) => {
+    setRefused((before) => ({ entryId, content, server, overall, attempt: (before?.attempt ?? 0) + 1 }));
+  };
+
+  const meet = (cause: unknown, entryId: string, content: EntryInput) => {
+    const problem = cause instanceof ApiProblem ? cause : null;
+    if (problem?.slug === 'stale') {
+      // The newer state is shown beside this one; see StaleChoice.
+      const current = entrySchema.safeParse(problem.current);
+      if (current.success) takeEntry(current.data);
+    } else if (problem?.slug !== 'not-found') {
+      const server = problemsFrom(problem?.errors ?? []);
+      refuse(entryId, content, server, server.size > 0 ? null : words.problem(cause));
+    }
+    // Locked, taken out or newer: whatever it was, the screen shall show the present state.
+    if (problem !== null && problem.status !== 0) {
+      void client.invalidateQueries({ queryKey: calendarKeys.one(calendar.id) });
+    }
+  };
+
+  const send = async (entryId: string, content: EntryInput, version: number | null) => {
+    const parsed = entryInput.safeParse(content);
+    if (!parsed.success) {
+      refuse(entryId, content, NO_PROBLEMS, null);
+      return;
+    }
+    try {
+      const saved =
+        version === null
+          ? await add.mutateAsync(parsed.data)
+          : await update.mutateAsync({ entryId, content: parsed.data, version });
+      setRefused(null);
+      edits.settle(entryId, content, saved);
+      if (version === null) selection.open(saved.id);
+      say(t('editor.saved', { title: saved.content.titleOfficer }));
+    } catch (cause) {
+      meet(cause, entryId, content);
+    }
+  };
+
+  const isRefused = refused !== null && selected !== null && refused.entryId === selected.id;
+  const isUnchanged = isRefused && sameJson(refused.content, selected.content);
+  return {
+    save: async () => {
+      if (selected === null) return;
+      const version = editor.edits.all.get(selected.id)?.baseVersion ?? selected.saved?.version ?? null;
+      await send(selected.id, selected.content, version);
+    },
+    saveJoined: async (content, version) => {
+      if (selected !== null) await send(selected.id, content, version);
+    },
+    isSaving: add.isPending || update.isPending,
+    problems:
+      selected === null ? NO_PROBLEMS : shownProblems(selected.content, isRefused, refused, isUnchanged),
+    overall: isUnchanged ? refused.overall : null,
+    attempt: isRefused ? refused.attempt : 0,
+  };
+}
+
+/** Days out of order are said at once; everything else after the first try to save, so that nobody is nagged. */
+function shownProblems(
+  content: EntryInput,
+  isRefused: boolean,
+  refused: Refused | null,
+  isUnchanged: boolean,
+): FieldProblems {
+  const own = problemsOf(content);
+  if (!isRefused) return new Map([...own].filter(([field]) => field.startsWith('offsets')));
+  return new Map([...(isUnchanged && refused ? refused.server : []), ...own]);
+}

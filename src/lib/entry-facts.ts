@@ -1,0 +1,81 @@
+import { useMemo } from 'react';
+import { useTranslation } from 'react-i18next';
+import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
+import { useDateWords } from './date-words.js';
+import { useEntryWords, type NamesByKey } from './entry-words.js';
+import { useMarkerDayWords } from './marker-day-words.js';
+
+export type FactGroup = 'what' | 'when' | 'signs' | 'late' | 'whose';
+
+export interface Fact {
+  key: string;
+  label: string;
+  value: string;
+}
+
+export interface EntryFacts {
+  /** Everything that an entry says, in five groups; what is empty is left out. */
+  groups: (
+    content: EntryInput,
+    dates: EntryDates | null,
+    year: number,
+    markers: NamesByKey,
+  ) => Record<FactGroup, Fact[]>;
+}
+
+/** An entry to be read. Needs the texts `calendars` and `sky`. */
+export function useEntryFacts(): EntryFacts {
+  const { t } = useTranslation('calendars');
+  const dateWords = useDateWords();
+  const entryWords = useEntryWords();
+  const markerDays = useMarkerDayWords();
+  return useMemo(() => {
+    const told = (facts: Fact[]) => facts.filter(({ value }) => value !== '');
+    const when = (content: EntryInput, dates: EntryDates | null, year: number, markers: NamesByKey) => [
+      { key: 'lead', label: t('form.goesBy'), value: entryWords.lead(content, markers) },
+      { key: 'sign', label: t('form.theSign'), value: dates?.marker ? markerDays.about(dates.marker) : '' },
+      {
+        key: 'days',
+        label: t('form.fourDays'),
+        value: dates?.window ? entryWords.windowSentence(dates.window) : t('days.none', { year }),
+      },
+      {
+        key: 'lastDate',
+        label: t('form.lastDate'),
+        value: content.lastDate
+          ? t('stale.lastDateIs', {
+              day: dateWords.day({ year, ...content.lastDate.date }),
+              source: content.lastDate.source,
+            })
+          : '',
+      },
+      {
+        key: 'watch',
+        label: t('form.protectiveWatch'),
+        value: content.protectiveWatch ? t('form.protectiveWatchHint') : '',
+      },
+    ];
+    return {
+      groups: (content, dates, year, markers) => ({
+        what: told([
+          { key: 'kind', label: t('form.kind'), value: t(`kind.${content.kind}`) },
+          { key: 'crop', label: t('form.crop'), value: content.crop },
+          { key: 'notes', label: t('form.notes'), value: content.notes },
+          { key: 'caution', label: t('form.caution'), value: content.caution },
+        ]),
+        when: told(when(content, dates, year, markers)),
+        signs: told([{ key: 'signs', label: t('form.otherSigns'), value: content.otherSigns }]),
+        late: told([{ key: 'late', label: t('form.ifLate'), value: content.ifLate }]),
+        whose: told([
+          { key: 'giver', label: t('form.giver'), value: content.giver },
+          { key: 'level', label: t('form.sharingLevel'), value: t(`level.${content.sharingLevel}`) },
+          {
+            key: 'print',
+            label: t('form.printing'),
+            value: content.agreedToPrint ? t('form.agreed') : t('form.notAgreed'),
+          },
+        ]),
+      }),
+    };
+  }, [t, dateWords, entryWords, markerDays]);
+}

@@ -1,0 +1,20 @@
+import { useMemo } from 'react';
+import type { Role } from '#shared/contracts/people.js';
+import { useCommunityChoice } from './community.js';
+
+export interface RolesIn {
+  /** Writes drafts, submits, publishes. */
+  isOfficer: boolean;
+  /** Officers, elders and stewards see drafts and answers; everybody else what was published. */
+  seesDrafts: boolean;
+}
+
+/** What the person may do in the village that a calendar belongs to; it need not be the one on screen. */
+export function useRolesIn(communityId: string): RolesIn {
+  const { memberships } = useCommunityChoice();
+  return useMemo(() => {
+    const roles = memberships.find((each) => each.communityId === communityId)?.roles ?? [];
+    const is = (...any: Role[]) => any.some((role) => roles.includes(role));
+    return { isOfficer: is('officer'), seesDrafts: is('officer', 'elder', 'steward') };
+  }, [memberships, communityId]);
+}
