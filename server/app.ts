@@ -29,6 +29,10 @@ import { SkyYearsService } from './features/stars/sky-years.service.js';
 import { SkylineEffectsService } from './features/stars/skyline-effects.service.js';
 import { starsRoutes } from './features/stars/stars.routes.js';
 import { StarsService } from './features/stars/stars.service.js';
+import { ComingMarkersService } from './features/today/coming-markers.service.js';
+import { todayRoutes } from './features/today/today.routes.js';
+import { TodayService } from './features/today/today.service.js';
+import { WaitingService } from './features/today/waiting.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
 import { PublishingService } from './features/versions/publishing.service.js';
@@ -112,14 +116,15 @@ export function createApp(options: AppOptions): App {
   const contents = new FrozenContentService(dataSource, clock, sky);
   const versions = new VersionsService(dataSource);
   const publishing = new PublishingService(dataSource, clock, contents, versions);
-  calendarsRoutes(mount, new CalendarsService(dataSource, clock), new EntriesService(dataSource, clock, sky));
+  const calendars = new CalendarsService(dataSource, clock);
+  calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
-  reviewsRoutes(
-    mount,
-    new AnswersService(dataSource, clock),
-    new SigningService(dataSource, clock, versions),
-  );
+  const answers = new AnswersService(dataSource, clock);
+  reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
   sheetsRoutes(mount, new SheetsService(contents, versions, clock));
+  const coming = new ComingMarkersService(skyYears, stars);
+  const waiting = new WaitingService(versions, answers);
+  todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, clock }));
   auditRoutes(mount, new AuditListService(dataSource));
 
   app.use(router);
