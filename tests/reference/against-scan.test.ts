@@ -16,6 +16,7 @@ import {
   anySkyline,
   anyThresholdDeg,
   anyYear,
+  PROPERTY_TIMEOUT_MS,
   SEED,
 } from '#tests/support/sky/arbitraries.js';
 import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
@@ -59,42 +60,46 @@ const NO_DAYS: Record<Phenomenon, readonly number[]> = {
 };
 
 describe('the closed form and a plain scan over every crossing', () => {
-  it('agree by the depth at the crossing at any place, year, threshold and level skyline', () => {
-    fc.assert(
-      fc.property(
-        anyHr,
-        anyLatitudeDeg,
-        anyLongitudeDeg,
-        anyYear,
-        fc.integer({ min: 0, max: 9 }),
-        anyThresholdDeg,
-        anyThresholdDeg,
-        (hr, latitudeDeg, longitudeDeg, year, skylineDeg, sameSide, oppositeSide) => {
-          const answer = depthAtCrossingYear({
-            hr,
-            latitudeDeg,
-            longitudeDeg,
-            year,
-            skylineDeg,
-            thresholdsDeg: { sameSide, oppositeSide },
-          });
-          const question: ScanQuestion = {
-            hr,
-            latitudeDeg,
-            longitudeDeg,
-            year: civilYearOf(year),
-            skyline: [{ azimuthDeg: 0, altitudeDeg: skylineDeg }],
-            neededDeg: (side) => (side === 'same' ? sameSide : oppositeSide),
-          };
-          expect(answer.outcome).toBe(scanYear(question).outcome);
-          expectAgreement(answer.dayNumbers ?? NO_DAYS, question);
-        },
-      ),
-      { seed: SEED, numRuns: 60 },
-    );
-  });
+  it(
+    'agree by the depth at the crossing at any place, year, threshold and level skyline',
+    { timeout: PROPERTY_TIMEOUT_MS },
+    () => {
+      fc.assert(
+        fc.property(
+          anyHr,
+          anyLatitudeDeg,
+          anyLongitudeDeg,
+          anyYear,
+          fc.integer({ min: 0, max: 9 }),
+          anyThresholdDeg,
+          anyThresholdDeg,
+          (hr, latitudeDeg, longitudeDeg, year, skylineDeg, sameSide, oppositeSide) => {
+            const answer = depthAtCrossingYear({
+              hr,
+              latitudeDeg,
+              longitudeDeg,
+              year,
+              skylineDeg,
+              thresholdsDeg: { sameSide, oppositeSide },
+            });
+            const question: ScanQuestion = {
+              hr,
+              latitudeDeg,
+              longitudeDeg,
+              year: civilYearOf(year),
+              skyline: [{ azimuthDeg: 0, altitudeDeg: skylineDeg }],
+              neededDeg: (side) => (side === 'same' ? sameSide : oppositeSide),
+            };
+            expect(answer.outcome).toBe(scanYear(question).outcome);
+            expectAgreement(answer.dayNumbers ?? NO_DAYS, question);
+          },
+        ),
+        { seed: SEED, numRuns: 60 },
+      );
+    },
+  );
 
-  it('agree by the altitude difference over skyline tables', () => {
+  it('agree by the altitude difference over skyline tables', { timeout: PROPERTY_TIMEOUT_MS }, () => {
     // The rule as the design states it, written down once more.
     const sameSideDeg = (thresholdDeg: number, altitudeDeg: number): number => {
       const a = Math.max(0, altitudeDeg);

@@ -75,8 +75,9 @@ function mostlyLight(
 
 /**
  * How many nights the star is hidden. With both dates of a disappearance: the nights between them. Where one of the two
- * is missing, or where they leave no night between them, the nights of the year count on which neither the rising, nor
- * the culmination, nor the setting falls into a dark enough sky; none means that the star never disappears.
+ * is missing, or where they leave no night between them, the nights of the year count on which neither
+ * rising, culmination and setting nor the Sun's deepest moment show the star in a dark enough sky; none means that it
+ * never disappears.
  */
 export function hiddenNightsOf(marker: MarkerAtPlace): HiddenNights {
   const crossings = marker.star.crossings;
@@ -87,7 +88,7 @@ export function hiddenNightsOf(marker: MarkerAtPlace): HiddenNights {
   const nights =
     span && span.to >= span.from
       ? Array.from({ length: span.to - span.from + 1 }, (_, index) => span.from + index)
-      : nightsWithoutDarkMoment(marker, both, firstDay, lastDay);
+      : nightsWithoutDarkMoment(marker, firstDay, lastDay);
   const notes: SkyNote[] = [];
   if (nights.length === 0) notes.push('never-disappears');
   if (mostlyLight(marker, both, nights)) notes.push('lost-in-light-nights');

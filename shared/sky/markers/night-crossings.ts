@@ -1,14 +1,18 @@
+import { horizontalOf } from '../horizon/horizontal.js';
+import { midnightOf, sinDeepestSun } from '../phenomena/deepest-sun.js';
 import { culminationOf, sinSunDepth, type SkylineCrossing } from '../phenomena/skyline-crossing.js';
 import { monthOfDay } from '../time/civil-year.js';
-import { RAD_PER_DEG, DEG_PER_RAD } from '../units/angle.js';
+import { localSiderealRad } from '../time/sidereal-clock.js';
+import { DEG_PER_RAD, RAD_PER_DEG, wrapTau } from '../units/angle.js';
 import { CLARITY_SHIFT_DEG, clarityOfMonth } from '../visibility/clarity.js';
 import { neededDepthDeg } from '../visibility/needed-depth.js';
 import { neededIn, placeShiftDeg } from './expected-crossing.js';
 import type { MarkerAtPlace } from './place-year.js';
 
 /**
- * Night by night: does one kind of moment (rising, setting, culmination) fall into dark enough a sky?
- * Used where an arc is missing and the dates alone cannot tell whether the star is seen.
+ * Night by night: is there a moment at which the star stands over the skyline of a dark enough sky? Looked at are the
+ * rising, the culmination, the setting and, while the star is up, the Sun's deepest moment. Used where an arc is missing
+ * and the dates alone cannot tell whether the star is seen.
  */
 
 /** Degrees that the month of a night adds to the needed depth. */
@@ -39,7 +43,7 @@ function eachReturn(
 export function sameSideNeeded(
   marker: MarkerAtPlace,
   crossing: SkylineCrossing,
-): (night: number, sun: number) => number {
+): (night: number, sunLongitudeRad: number) => number {
   const shiftDeg = placeShiftDeg(marker, 'same');
   const byClarity = [-1, 0, 1].map((clarityDeg) => neededIn(marker, crossing, 'same', shiftDeg + clarityDeg));
   return (night, sunLongitudeRad) =>
@@ -47,43 +51,56 @@ export function sameSideNeeded(
 }
 
 /**
- * Sine of the depth needed at the culmination. The star's altitude counts there under either skyline rule, because no
- * skyline is being crossed: a star high in the sky is seen in a lighter one.
+ * Sine of the depth needed for a star high in the sky. Its altitude counts under either skyline rule, because no skyline
+ * is being crossed: a star that stands high is seen in a lighter sky.
  */
-function culminationNeeded(marker: MarkerAtPlace, culmination: SkylineCrossing): (night: number) => number {
-  const thresholdDeg = marker.threshold.sameSideDeg + placeShiftDeg(marker, 'same');
-  const altitudeDeg = culmination.starAltitudeRad * DEG_PER_RAD;
-  return (night) =>
-    Math.sin(
-      neededDepthDeg(
-        'altitude-difference',
-        'same',
-        thresholdDeg + clarityShiftOfNight(marker, night),
-        altitudeDeg,
-      ) * RAD_PER_DEG,
-    );
+function neededUpThere(marker: MarkerAtPlace, altitudeRad: number, night: number): number {
+  const thresholdDeg =
+    marker.threshold.sameSideDeg + placeShiftDeg(marker, 'same') + clarityShiftOfNight(marker, night);
+  const depthDeg = neededDepthDeg('altitude-difference', 'same', thresholdDeg, altitudeRad * DEG_PER_RAD);
+  return Math.sin(depthDeg * RAD_PER_DEG);
 }
 
-/** Which nights of a span have a culmination in a dark enough sky; index 0 is the first night. */
-export function darkCulminations(marker: MarkerAtPlace, fromNight: number, toNight: number): Uint8Array {
-  const dark = new Uint8Array(toNight - fromNight + 1);
-  const culmination = culminationOf(marker.year, marker.ground, marker.starIndex);
-  const needed = culminationNeeded(marker, culmination);
-  eachReturn(marker, culmination, fromNight, toNight, (night, sun) => {
-    if (sinSunDepth(culmination, sun) >= needed(night)) dark[night - fromNight] = 1;
-  });
-  return dark;
-}
-
-/** The nights of a span in which neither a crossing nor the culmination falls into a dark enough sky. */
-export function nightsWithoutDarkMoment(
+/** Is the star up, and the sky dark enough for its altitude, when the Sun is deepest? */
+function seenAtDeepest(
   marker: MarkerAtPlace,
-  crossings: readonly SkylineCrossing[],
-  fromNight: number,
-  toNight: number,
-): number[] {
-  const seen = darkCulminations(marker, fromNight, toNight);
-  for (const crossing of crossings) {
+  crossings: { rising: SkylineCrossing; setting: SkylineCrossing },
+  night: number,
+): boolean {
+  const { year, ground } = marker;
+  const sinDepth = sinDeepestSun(year, ground, night);
+  if (sinDepth <= 0) return false;
+  const siderealRad = localSiderealRad(year.sidereal, midnightOf(ground, night), ground.longitudeRad);
+  const sinceRising = wrapTau(siderealRad - crossings.rising.siderealRad);
+  if (sinceRising > wrapTau(crossings.setting.siderealRad - crossings.rising.siderealRad)) return false;
+  const place = year.stars.placeOf(marker.starIndex);
+  const { sinDeclination, cosDeclination, rightAscensionRad } = place;
+  const star = horizontalOf(ground.latitude, sinDeclination, cosDeclination, siderealRad - rightAscensionRad);
+  return sinDepth >= neededUpThere(marker, star.altitudeRad, night);
+}
+
+/** Which nights of a span let the star be seen high up, at its culmination or at the Sun's deepest; 1 for each. */
+export function seenHighUp(marker: MarkerAtPlace, fromNight: number, toNight: number): Uint8Array {
+  const seen = new Uint8Array(toNight - fromNight + 1);
+  const { crossings } = marker.star;
+  if (!crossings) return seen;
+  const culmination = culminationOf(marker.year, marker.ground, marker.starIndex);
+  eachReturn(marker, culmination, fromNight, toNight, (night, sun) => {
+    const needed = neededUpThere(marker, culmination.starAltitudeRad, night);
+    if (sinSunDepth(culmination, sun) >= needed) seen[night - fromNight] = 1;
+  });
+  for (let night = fromNight; night <= toNight; night += 1) {
+    if (seen[night - fromNight] === 0 && seenAtDeepest(marker, crossings, night)) seen[night - fromNight] = 1;
+  }
+  return seen;
+}
+
+/** The nights of a span without any moment at which the star can be seen. */
+export function nightsWithoutDarkMoment(marker: MarkerAtPlace, fromNight: number, toNight: number): number[] {
+  const { crossings } = marker.star;
+  if (!crossings) return [];
+  const seen = seenHighUp(marker, fromNight, toNight);
+  for (const crossing of [crossings.rising, crossings.setting]) {
     const needed = sameSideNeeded(marker, crossing);
     eachReturn(marker, crossing, fromNight, toNight, (night, sun) => {
       if (sinSunDepth(crossing, sun) >= needed(night, sun)) seen[night - fromNight] = 1;

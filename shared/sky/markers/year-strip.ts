@@ -4,7 +4,7 @@ import type { StripSegment } from '../types.js';
 import type { NightState } from '../vocabulary.js';
 import { Disappearances } from './disappearances.js';
 import type { ExpectedCrossing } from './expected-crossing.js';
-import { darkCulminations } from './night-crossings.js';
+import { seenHighUp } from './night-crossings.js';
 import type { MarkerAtPlace } from './place-year.js';
 
 /** The nights in which a rising (or a setting) is seen; both ends belong to it. */
@@ -65,7 +65,7 @@ function holds(nights: SeenNights | null | undefined, night: number): boolean {
   return nights !== null && nights !== undefined && night >= nights.from && night <= nights.to;
 }
 
-function stateOf(night: number, cycles: readonly Cycle[], culminatesInDark: boolean): NightState {
+function stateOf(night: number, cycles: readonly Cycle[], highUp: boolean): NightState {
   if (cycles.some((cycle) => holds(cycle.hidden, night))) return 'hidden';
   if (cycles.some((cycle) => holds(cycle.settings, night) && holds(cycle.risings, night)))
     return 'dusk-and-dawn';
@@ -76,7 +76,7 @@ function stateOf(night: number, cycles: readonly Cycle[], culminatesInDark: bool
   if (sets) return 'after-dusk';
   // Between the last evening rising and the first morning setting the star is up all night, unless the night is
   // too light even for a star high in the sky.
-  return culminatesInDark ? 'all-night' : 'hidden';
+  return highUp ? 'all-night' : 'hidden';
 }
 
 /** The states of all nights of the prepared civil year, joined into runs. */
@@ -97,10 +97,10 @@ export function yearStripOf(marker: MarkerAtPlace): StripSegment[] {
   for (let index = disappearances.first; index <= disappearances.last; index += 1) {
     cycles.push(cycleOf(marker, crossings, disappearances, index));
   }
-  const dark = darkCulminations(marker, firstDay, lastDay);
+  const seen = seenHighUp(marker, firstDay, lastDay);
   const segments: StripSegment[] = [];
   for (let night = firstDay; night <= lastDay; night += 1) {
-    const state = stateOf(night, cycles, dark[night - firstDay] === 1);
+    const state = stateOf(night, cycles, seen[night - firstDay] === 1);
     const last = segments.at(-1);
     if (last?.state === state) last.toDayNumber = night;
     else segments.push({ state, fromDayNumber: night, toDayNumber: night });

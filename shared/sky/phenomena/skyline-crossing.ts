@@ -54,6 +54,12 @@ function crossingAt(
   };
 }
 
+/** At a crossing the star's altitude is the skyline's own, free of rounding: flat is exactly flat. */
+function onSkyline(crossing: SkylineCrossing, ground: Ground): SkylineCrossing {
+  crossing.starAltitudeRad = ground.skyline.altitudeRad(crossing.starAzimuthRad);
+  return crossing;
+}
+
 /** A star's rising and setting over a place's skyline in a prepared year. */
 export function starAtPlace(year: PreparedYear, ground: Ground, starIndex: number): StarAtPlace {
   const place = year.stars.placeOf(starIndex);
@@ -64,8 +70,8 @@ export function starAtPlace(year: PreparedYear, ground: Ground, starIndex: numbe
     outcome: path.outcome,
     detail: path.detail,
     crossings: {
-      rising: crossingAt(year, ground, place, path.riseHourAngleRad),
-      setting: crossingAt(year, ground, place, path.setHourAngleRad),
+      rising: onSkyline(crossingAt(year, ground, place, path.riseHourAngleRad), ground),
+      setting: onSkyline(crossingAt(year, ground, place, path.setHourAngleRad), ground),
     },
   };
 }

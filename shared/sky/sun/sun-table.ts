@@ -15,8 +15,8 @@ export interface SunTable {
 }
 
 const STEP_DAYS = 4;
-/** 1200 days on either side: enough for a year, its neighbours and the widest ranges. */
-const HALF_NODES = 300;
+/** 1800 days on either side: enough for a year, the disappearances around it and the widest ranges. */
+const HALF_NODES = 450;
 const MEAN_MOTION_RAD_PER_DAY = TAU / 365.2422;
 
 /** @param epochJdUt Julian Day (UT) of the middle of the table */

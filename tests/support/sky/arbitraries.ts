@@ -22,3 +22,6 @@ export const anySkyline: fc.Arbitrary<SkylinePoint[]> = fc.uniqueArray(
 
 /** Fixed, so that a run can be repeated; the cases differ from property to property all the same. */
 export const SEED = 20_270_101;
+
+/** A property takes a second or two; a machine that is busy with other work may need many times that. */
+export const PROPERTY_TIMEOUT_MS = 60_000;

@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { horizontalOf, latitudeOf } from '#shared/sky/horizon/horizontal.js';
 import { prepareSkyline } from '#shared/sky/horizon/skyline.js';
 import { tableCrossings } from '#shared/sky/horizon/table-crossings.js';
-import { anyLatitudeDeg, anySkyline, SEED } from '#tests/support/sky/arbitraries.js';
+import { anyLatitudeDeg, anySkyline, PROPERTY_TIMEOUT_MS, SEED } from '#tests/support/sky/arbitraries.js';
 
 const DEG = Math.PI / 180;
 const star = (decDeg: number) => ({
@@ -59,42 +59,46 @@ describe('crossings of a skyline table', () => {
     expect(found.setHourAngleRad).toBeCloseTo(-found.riseHourAngleRad, 6);
   });
 
-  it('are those of a walk in small steps, for any table, latitude and declination', () => {
-    fc.assert(
-      fc.property(
-        anyLatitudeDeg,
-        fc.integer({ min: -80, max: 80 }),
-        anySkyline,
-        (latitudeDeg, decDeg, table) => {
-          const skyline = prepareSkyline(table);
-          fc.pre(!skyline.level);
-          const latitude = latitudeOf(latitudeDeg * DEG);
-          const { sinDeclination, cosDeclination } = star(decDeg);
-          const above = (hourAngle: number): boolean => {
-            const place = horizontalOf(latitude, sinDeclination, cosDeclination, hourAngle);
-            return place.altitudeRad >= skyline.altitudeRad(place.azimuthRad);
-          };
-          const steps = 20_000;
-          let rise: number | null = null;
-          let set: number | null = null;
-          for (let step = 1; step <= steps; step += 1) {
-            const [from, to] = [step - 1, step].map((count) => -Math.PI + (count * 2 * Math.PI) / steps);
-            if (from === undefined || to === undefined || above(from) === above(to)) continue;
-            if (above(to)) rise ??= to;
-            else set = to;
-          }
-          const found = tableCrossings(latitude, star(decDeg), skyline);
-          if (rise === null || set === null) {
-            expect(found).toBe(above(0) ? 'always-above' : 'always-below');
-          } else {
-            if (typeof found === 'string') throw new Error(found);
-            // One step of the walk.
-            expect(Math.abs(found.riseHourAngleRad - rise)).toBeLessThan((2.1 * Math.PI) / steps);
-            expect(Math.abs(found.setHourAngleRad - set)).toBeLessThan((2.1 * Math.PI) / steps);
-          }
-        },
-      ),
-      { seed: SEED, numRuns: 60 },
-    );
-  });
+  it(
+    'are those of a walk in small steps, for any table, latitude and declination',
+    { timeout: PROPERTY_TIMEOUT_MS },
+    () => {
+      fc.assert(
+        fc.property(
+          anyLatitudeDeg,
+          fc.integer({ min: -80, max: 80 }),
+          anySkyline,
+          (latitudeDeg, decDeg, table) => {
+            const skyline = prepareSkyline(table);
+            fc.pre(!skyline.level);
+            const latitude = latitudeOf(latitudeDeg * DEG);
+            const { sinDeclination, cosDeclination } = star(decDeg);
+            const above = (hourAngle: number): boolean => {
+              const place = horizontalOf(latitude, sinDeclination, cosDeclination, hourAngle);
+              return place.altitudeRad >= skyline.altitudeRad(place.azimuthRad);
+            };
+            const steps = 20_000;
+            let rise: number | null = null;
+            let set: number | null = null;
+            for (let step = 1; step <= steps; step += 1) {
+              const [from, to] = [step - 1, step].map((count) => -Math.PI + (count * 2 * Math.PI) / steps);
+              if (from === undefined || to === undefined || above(from) === above(to)) continue;
+              if (above(to)) rise ??= to;
+              else set = to;
+            }
+            const found = tableCrossings(latitude, star(decDeg), skyline);
+            if (rise === null || set === null) {
+              expect(found).toBe(above(0) ? 'always-above' : 'always-below');
+            } else {
+              if (typeof found === 'string') throw new Error(found);
+              // One step of the walk.
+              expect(Math.abs(found.riseHourAngleRad - rise)).toBeLessThan((2.1 * Math.PI) / steps);
+              expect(Math.abs(found.setHourAngleRad - set)).toBeLessThan((2.1 * Math.PI) / steps);
+            }
+          },
+        ),
+        { seed: SEED, numRuns: 60 },
+      );
+    },
+  );
 });
