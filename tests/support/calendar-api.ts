@@ -21,18 +21,17 @@ export interface Village {
 
 /** A signed-in browser for each, and the village's place. */
 export async function openVillage(api: TestApi): Promise<Village> {
-  const officer = await api.signIn('officer');
+  const [officer, steward, elder, elder2, elder3] = await Promise.all([
+    api.signIn('officer'),
+    api.signIn('steward'),
+    api.signIn('elder'),
+    api.signIn('elder2'),
+    api.signIn('elder3'),
+  ]);
   const place = await api.dataSource
     .getRepository(PlaceEntity)
     .findOneByOrFail({ communityId: officer.communityId });
-  return {
-    officer,
-    steward: await api.signIn('steward'),
-    elder: await api.signIn('elder'),
-    elder2: await api.signIn('elder2'),
-    elder3: await api.signIn('elder3'),
-    placeId: place.id,
-  };
+  return { officer, steward, elder, elder2, elder3, placeId: place.id };
 }
 
 /** Sowing by the Pleiades’ first morning; a whole entry, ready to send. */
