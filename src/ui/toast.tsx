@@ -58,7 +58,9 @@ function Toast({ item, onGone }: { item: ToastItem; onGone: (id: number) => void
   useEffect(() => {
     const look = () => {
       // Somebody is reading it or about to press: ask again a little later.
-      if (box.current?.matches(':hover, :focus-within') === true) timer = setTimeout(look, AGAIN_MS);
+      const isHeld =
+        box.current?.matches(':hover') === true || box.current?.contains(document.activeElement) === true;
+      if (isHeld) timer = setTimeout(look, AGAIN_MS);
       else onGone(id);
     };
     let timer = setTimeout(look, onUndo ? UNDO_MS : PLAIN_MS);

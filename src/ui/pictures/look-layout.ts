@@ -1,4 +1,10 @@
-import { horizonAltitude, type HorizonPoint, type SkylineScale, type SkylineView } from './skyline.js';
+import {
+  horizonAltitude,
+  horizonWithin,
+  type HorizonPoint,
+  type SkylineScale,
+  type SkylineView,
+} from './skyline.js';
 
 /** A fist at the end of a straight arm. */
 export const HAND_DEG = 10;
@@ -54,10 +60,13 @@ export function labelTops(
   return tops;
 }
 
-/** The words stand to the right of the point: the ground under them must not reach into them. */
+/** The words stand to the right of the point, about this far: the ground under them must not reach into them. */
+const WORDS_PX = 190;
+
 function highestHorizon(points: readonly HorizonPoint[], azimuthDeg: number, scale: SkylineScale): number {
-  const degPerPx = 1 / (scale.x(1) - scale.x(0));
-  return Math.max(...[0, 60, 120, 180].map((px) => horizonAltitude(points, azimuthDeg + px * degPerPx)));
+  const toAzimuthDeg = azimuthDeg + WORDS_PX / (scale.x(1) - scale.x(0));
+  const corners = horizonWithin(points, { fromAzimuthDeg: azimuthDeg, toAzimuthDeg });
+  return Math.max(...corners.map((corner) => corner.altitudeDeg));
 }
 
 export interface CompassWord {

@@ -104,7 +104,10 @@ function scaleOf(view: SkylineView, width: number, height: number): SkylineScale
 }
 
 /** Corners of the horizon within a view, its two edges included; flat at 0° without points. */
-export function horizonWithin(points: readonly HorizonPoint[], view: SkylineView): HorizonPoint[] {
+export function horizonWithin(
+  points: readonly HorizonPoint[],
+  view: Pick<SkylineView, 'fromAzimuthDeg' | 'toAzimuthDeg'>,
+): HorizonPoint[] {
   const { fromAzimuthDeg, toAzimuthDeg } = view;
   const inside = points
     .flatMap((point) =>

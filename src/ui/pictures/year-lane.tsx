@@ -64,6 +64,21 @@ export function YearLane({ span, segments, label, height = 48, today, className 
   );
 }
 
+/**
+ * Place of a state along the lane. A gap stands before every state but the first; a state of a few nights keeps its
+ * least width, and is held inside the picture at its end.
+ */
+export function laneBox(
+  place: { start: number; width: number },
+  isFirst: boolean,
+): { x: string; width: string } {
+  const gap = isFirst ? 0 : GAP;
+  return {
+    x: `min(calc(${percent(place.start)} + ${gap}px), calc(100% - ${LEAST_WIDTH}px))`,
+    width: `max(${LEAST_WIDTH}px, calc(${percent(place.width)} - ${gap}px))`,
+  };
+}
+
 function nights(segment: LaneSegment): number {
   return segment.toDayNumber - segment.fromDayNumber;
 }
@@ -71,12 +86,7 @@ function nights(segment: LaneSegment): number {
 function Stretch({ segment, span, height }: { segment: LaneSegment; span: DaySpan; height: number }) {
   const place = stretch(segment.fromDayNumber, segment.toDayNumber, span);
   if (place === null) return null;
-  // The gap stands before every state but the first; a short last one is held inside the picture.
-  const gap = segment.fromDayNumber <= span.first ? 0 : GAP;
-  const style = {
-    x: `min(calc(${percent(place.start)} + ${gap}px), calc(100% - ${LEAST_WIDTH}px))`,
-    width: `max(${LEAST_WIDTH}px, calc(${percent(place.width)} - ${gap}px))`,
-  };
+  const style = laneBox(place, segment.fromDayNumber <= span.first);
   const night = height - FOOT;
   if (segment.state === 'hidden') {
     return (

@@ -1,0 +1,60 @@
+import { describe, expect, it } from 'vitest';
+import { fittingCompass, labelTops, lookView } from '#src/ui/pictures/look-layout.js';
+import type { SkylineScale, SkylineView } from '#src/ui/pictures/skyline.js';
+
+const HEIGHT = 210;
+const hills = [
+  { azimuthDeg: 60, altitudeDeg: 2 },
+  { azimuthDeg: 80, altitudeDeg: 6 },
+];
+
+function scaleOf(view: SkylineView, width: number): SkylineScale {
+  const perDeg = width / (view.toAzimuthDeg - view.fromAzimuthDeg);
+  const down = HEIGHT / (view.topDeg - view.bottomDeg);
+  return {
+    width,
+    height: HEIGHT,
+    x: (azimuthDeg) => (azimuthDeg - view.fromAzimuthDeg) * perDeg,
+    y: (altitudeDeg) => (view.topDeg - altitudeDeg) * down,
+  };
+}
+
+describe('where to look', () => {
+  it('never stretches the sky: a hand across is a hand up, on every width', () => {
+    for (const width of [256, 320, 560, 1200]) {
+      const scale = scaleOf(lookView(hills, 66, 14, HEIGHT)(width), width);
+      expect(scale.x(76) - scale.x(66)).toBeCloseTo(scale.y(0) - scale.y(10), 6);
+    }
+  });
+
+  it('keeps the words above the ground and apart from one another', () => {
+    const scale = scaleOf(lookView(hills, 66, 14, HEIGHT)(320), 320);
+    const tops = labelTops(
+      [
+        { azimuthDeg: 66, altitudeDeg: 3 },
+        { azimuthDeg: 66.5, altitudeDeg: 4 },
+        { azimuthDeg: 68, altitudeDeg: 14 },
+      ],
+      hills,
+      scale,
+    );
+    const [low = 0, middle = 0, high = 0] = tops;
+    expect(low + 24).toBeLessThanOrEqual(scale.y(6));
+    expect(middle + 24).toBeLessThanOrEqual(low);
+    expect(high + 24).toBeLessThanOrEqual(middle);
+  });
+
+  it('leaves out compass words that would run into the one nearest to the star', () => {
+    const compass = [
+      { azimuthDeg: 45, words: 'north-east' },
+      { azimuthDeg: 67.5, words: 'east-north-east' },
+      { azimuthDeg: 90, words: 'east' },
+    ];
+    const at = (width: number) =>
+      fittingCompass(compass, 66, scaleOf(lookView(hills, 66, 14, HEIGHT)(width), width)).map(
+        ({ words }) => words,
+      );
+    expect(at(256)).toEqual(['east-north-east']);
+    expect(at(900).sort()).toEqual(['east', 'east-north-east', 'north-east']);
+  });
+});
