@@ -70,8 +70,7 @@ async function setUp(wanted) {
   mkdirSync(path.join(projectDir, '.tmp'), { recursive: true });
 }
 
-/** A build that fails is one failure, and the other tests still have their say. */
-/** @param {() => void} orGoOn */
+/** A build that fails is one failure, and the other tests still have their say. @param {() => void} orGoOn */
 async function builds(orGoOn) {
   try {
     await ensureBuilt(orGoOn);
