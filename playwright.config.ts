@@ -9,6 +9,8 @@ process.env['JOURNEY_PORT'] ??= String(await freePort());
 
 export default defineConfig({
   testDir: 'tests/e2e',
+  // Playwright does not read the aliases of package.json; this file repeats them for it.
+  tsconfig: './tests/e2e/tsconfig.json',
   outputDir: '.tmp/journeys',
   globalSetup: './tests/support/journey-server.ts',
   // One product, one database, one story after the other.
