@@ -30,6 +30,12 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
   { path: PATTERNS.newPlace, texts: ['places', 'sky'], load: () => import('./routes/place-new.js') },
   { path: PATTERNS.place, texts: ['places', 'sky'], load: () => import('./routes/place.js') },
+  { path: PATTERNS.village, texts: [], load: () => import('./routes/village.js') },
+  {
+    path: PATTERNS.villagePlaces,
+    texts: ['people', 'places'],
+    load: () => import('./routes/village-places.js'),
+  },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {

@@ -3,10 +3,11 @@ import { useCallback } from 'react';
 import { sessionEndpoints, type SessionState } from '#shared/contracts/session.js';
 import { callApi } from './api-client.js';
 import { keepCsrfToken } from './csrf.js';
+import { SESSION_KEY } from './query-client.js';
 
 /** Who is here, to which communities they belong, and the token for writes. */
 export const sessionQuery = queryOptions({
-  queryKey: ['session'],
+  queryKey: SESSION_KEY,
   queryFn: async ({ signal }) => {
     const state = await callApi(sessionEndpoints.read, { signal });
     keepCsrfToken(state.csrfToken);
@@ -31,7 +32,7 @@ export function useTakeSession(): (state: SessionState) => void {
       keepCsrfToken(state.csrfToken);
       const before = client.getQueryData(sessionQuery.queryKey);
       if (before?.person?.id !== state.person?.id) {
-        client.removeQueries({ predicate: (query) => query.queryKey[0] !== sessionQuery.queryKey[0] });
+        client.removeQueries({ predicate: (query) => query.queryKey[0] !== SESSION_KEY[0] });
       }
       client.setQueryData(sessionQuery.queryKey, state);
     },

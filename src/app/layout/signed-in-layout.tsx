@@ -20,7 +20,9 @@ export function SignedInLayout() {
   const matches = useMatches();
   const { t } = useTranslation('common');
   if (person === null) {
-    return <Navigate to={paths.signIn(location.pathname + location.search)} replace />;
+    // From the account page people sign out: nothing calls them back there.
+    const next = location.pathname === PATTERNS.account ? undefined : location.pathname + location.search;
+    return <Navigate to={paths.signIn(next)} replace />;
   }
   const isAccount = location.pathname === PATTERNS.account;
   const hasRail = matches.every(({ handle }) => (handle as RouteHandle | undefined)?.rail !== false);
