@@ -58,7 +58,7 @@ export function fontOf(face: FaceName, weight: FontWeight): Font {
 
 const graphemes = new Intl.Segmenter('und', { granularity: 'grapheme' });
 /** Joiners, marks of direction and variation selectors need no picture of their own. */
-const NEEDS_NO_GLYPH = /^[\u200b-\u200f\u2060\ufe00-\ufe0f]$/u;
+const NEEDS_NO_GLYPH = /^(?:\p{Cf}|\p{Variation_Selector})$/u;
 /** Spaces, figures and punctuation stay with the script around them where its typeface has them. */
 const NEUTRAL = /^[\p{White_Space}\p{P}\p{S}]+$/u;
 

@@ -106,18 +106,38 @@ function drawText(doc: PDFKit.PDFDocument, text: TextPrimitive): void {
     let x = line.x;
     for (const run of textRuns(line.text, text.weight)) {
       doc.font(registered(doc, run.face, text.weight));
-      doc.text(run.text, x, line.baseline, {
-        lineBreak: false,
-        baseline: 'alphabetic',
-        // Lay the run out as one piece, as it was measured; without this, word by word.
-        features: [],
-        fill: !isOutline,
-        stroke: isOutline,
-      });
+      const draw = (): void => {
+        doc.text(run.text, x, line.baseline, {
+          lineBreak: false,
+          baseline: 'alphabetic',
+          // Lay the run out as one piece, as it was measured; without this, word by word.
+          features: [],
+          fill: !isOutline,
+          stroke: isOutline,
+        });
+      };
+      if (run.face === 'devanagari') withReadableText(doc, run.text, draw);
+      else draw();
       x += fontMeasurer.widthMm(run.text, { sizePt: text.sizePt, weight: text.weight });
     }
     doc.restore();
   }
+  doc.restore();
+}
+
+/**
+ * Scripts that move vowel signs about on paper cannot be read back in their order from the glyphs, so the text
+ * is written down beside them. Readers place it by the drawing state at its end, which therefore has to be the
+ * one the glyphs were drawn in: upside down, as the PDF library draws text.
+ */
+function withReadableText(doc: PDFKit.PDFDocument, text: string, draw: () => void): void {
+  const { height } = doc.page;
+  doc.save().transform(1, 0, 0, -1, 0, height);
+  doc.markContent('Span', { actual: text });
+  doc.save().transform(1, 0, 0, -1, 0, height);
+  draw();
+  doc.restore();
+  doc.endMarkedContent();
   doc.restore();
 }
 

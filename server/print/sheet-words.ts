@@ -109,6 +109,7 @@ export function sheetWords({ translate: t, language, year, villageMonths }: Shee
     eyesCaution: () => t('foot.eyes'),
     contacts: ({ weather, agriculture }) =>
       t('foot.contacts', { weather: contact(weather), agriculture: contact(agriculture) }),
+    contactsElsewhere: () => t('foot.contactsElsewhere'),
     measureAcross: () => t('foot.measureAcross'),
     measureDown: () => t('foot.measureDown'),
     fullSize: () => t('foot.fullSize'),

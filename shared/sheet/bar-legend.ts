@@ -7,7 +7,7 @@ import type { TextMeasurer } from './text-layout.js';
 import { roundMm } from './units.js';
 import { LEGEND } from './word-block.js';
 
-export const BAR_LEGEND_MM = 7;
+export const BAR_LEGEND_MM = 7.2;
 const SAMPLE_MM = 8.5;
 
 interface Sample {

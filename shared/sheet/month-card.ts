@@ -26,9 +26,12 @@ const RIGHT_MM = LEFT_MM + 7 * CARD_PITCH_MM;
 const BOTTOM_MM = CARD_HEIGHT_MM - 8;
 const BAR_DOWN_X_MM = 10.6;
 const BAR_DOWN_TOP_MM = 62;
+const RING_DY_MM = 4.9;
 const LANES_TOP_MM = 8.8;
 const LANES_HEIGHT_MM = 16.2;
 const MAX_LANES = 4;
+/** On a page without holes the foot may take as much as it needs. */
+const FULL_FOOT_MM = 120;
 const WEEKDAY: TextStyle = { role: 'weekday', sizePt: 14, weight: 400 };
 const AREA = { left: LEFT_MM, right: RIGHT_MM };
 
@@ -43,14 +46,17 @@ export function monthCards(model: SheetModel, measurer: TextMeasurer): SheetPage
 
 function cardsOfMonth(model: SheetModel, month: number, measurer: TextMeasurer): SheetPage[] {
   const grid = monthGrid(model, month, measurer);
-  const foot = pageFoot(model, AREA, namesMarkers(model, month), measurer);
-  const footTop = BOTTOM_MM - foot.height;
   const name = model.words.monthName(month).officer;
   const pointer = plainBlock(model.words.moreOnNextCard(name), LEGEND_BOLD, AREA, measurer);
   const wordsTop = grid.bottom + 1;
+  const footRoom = BOTTOM_MM - wordsTop - pointer.height - 1;
+  const foot = pageFoot(model, AREA, namesMarkers(model, month), footRoom, measurer);
+  const footTop = BOTTOM_MM - foot.height;
   const fresh = continuationTop(model, month, measurer);
+  const items = monthWords(model, month, AREA, measurer);
+  const statements = foot.leftOut.map((text) => plainBlock(text, LEGEND, AREA, measurer));
   const { here, onward } = planCard(
-    monthWords(model, month, AREA, measurer),
+    [...items, ...statements.map((block) => ({ short: block, full: block }))],
     footTop - wordsTop - 0.5,
     pointer.height,
   );
@@ -80,7 +86,7 @@ function cardsOfMonth(model: SheetModel, month: number, measurer: TextMeasurer):
 function undatedCards(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
   const blocks = undatedWords(model, AREA, measurer).map(({ full }) => full);
   if (blocks.length === 0) return [];
-  const foot = pageFoot(model, AREA, false, measurer);
+  const foot = pageFoot(model, AREA, false, FULL_FOOT_MM, measurer);
   const footTop = BOTTOM_MM - foot.height;
   const heading = model.words.noDateHeading(model.year);
   const head = cardHead(model, null, heading, AREA, measurer);
@@ -215,7 +221,7 @@ function weekRow(top: number, firstDay: number, lanes: RowLanes): DayRow {
     pitchMm: CARD_PITCH_MM,
     top,
     ringDx: 6.15,
-    ringDy: 4.9,
+    ringDy: RING_DY_MM,
     lanesTop: LANES_TOP_MM,
     lanePitchMm: LANES_HEIGHT_MM / used,
   };
@@ -230,30 +236,33 @@ function leftOver(
   measurer: TextMeasurer,
 ): Primitive[] {
   if (lanes.left.length === 0) return [];
-  const x = row.leftOf(firstDay) + 0.2;
+  const start = row.leftOf(firstDay) + 0.2;
   const numbers = `+ ${lanes.left.map(({ tag }) => tag).join(', ')}`;
-  const fits = measurer.widthMm(numbers, FOOT) <= RIGHT_MM - x;
+  const fits = measurer.widthMm(numbers, FOOT) <= RIGHT_MM - start;
   const text = fits ? numbers : model.words.moreBars(lanes.left.length);
+  // A first week that begins late in the row has free ground to its left.
+  const x = Math.max(LEFT_MM, Math.min(start, RIGHT_MM - measurer.widthMm(text, FOOT)));
   const baseline = laneMiddle(row, lanes.laneCount) + capHeightMm(FOOT.sizePt) / 2;
   return [textOnBaseline([text], { x, baseline, figures: true }, FOOT, measurer)];
 }
 
-/** Beside 29 February: the years that have it. In the free cells to its right, or under the holes. */
+/** Beside 29 February: the years that have it. In one line in the free cells to its right, or under the holes. */
 function leapNote(
   model: SheetModel,
   at: { readonly column: number; readonly rowTop: number; readonly bottom: number },
   measurer: TextMeasurer,
 ): { primitives: Primitive[]; bottom: number } {
-  const text = model.words.leapYearsOnly(nextLeapYears(model.year, 3));
+  const years = nextLeapYears(model.year, 3);
+  const short = model.words.leapYearsShort(years);
   const left = LEFT_MM + (at.column + 1) * CARD_PITCH_MM + 2;
-  const beside = RIGHT_MM - left > 45 ? wrapText(text, RIGHT_MM - left, FOOT, measurer) : [];
-  if (beside.length > 0 && beside.length * leadingMm(FOOT) < CARD_PITCH_MM - 1) {
+  if (measurer.widthMm(short, FOOT) <= RIGHT_MM - left) {
+    const baseline = at.rowTop + RING_DY_MM + capHeightMm(FOOT.sizePt) / 2;
     return {
-      primitives: [textBlock(beside, { x: left, top: at.rowTop + 0.8 }, FOOT, measurer)],
+      primitives: [textOnBaseline([short], { x: left, baseline }, FOOT, measurer)],
       bottom: at.bottom,
     };
   }
-  const lines = wrapText(text, RIGHT_MM - LEFT_MM, LEGEND, measurer);
+  const lines = wrapText(model.words.leapYearsOnly(years), RIGHT_MM - LEFT_MM, LEGEND, measurer);
   return {
     primitives: [textBlock(lines, { x: RIGHT_MM, top: at.bottom, align: 'right' }, LEGEND, measurer)],
     bottom: at.bottom + lines.length * leadingMm(LEGEND),

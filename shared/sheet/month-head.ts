@@ -1,9 +1,9 @@
 import { dayOfYear, daysInMonth, isoOf } from './civil-days.js';
 import { moonDisc } from './moon.js';
-import { issueWords } from './page-foot.js';
+import { HEAD_NAME_MM, issueWords } from './page-foot.js';
 import type { Primitive } from './primitives.js';
 import type { SheetModel } from './sheet-model.js';
-import { leadingMm, textBlock, textOnBaseline, wrapText } from './text-layout.js';
+import { leadingMm, onOneLine, textBlock, textOnBaseline, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
 import { versionFigure } from './version-figure.js';
 import { LEGEND } from './word-block.js';
@@ -18,7 +18,6 @@ const NAME_WIDTH_MM = 76;
 const MOON_PITCH_MM = 11.6;
 const MOON_RADIUS_MM = 4.4;
 const GAP_MM = 3;
-const LEAST_PLACE_MM = 40;
 
 export interface HeadArea {
   readonly left: number;
@@ -85,21 +84,24 @@ export function cardHead(
 
   const under = [title?.other ?? '', second].filter((part) => part !== '').join(' · ');
   const moonWords = moons.length === 0 ? '' : model.words.moonPhases(moons.map(({ phase }) => phase));
-  const place = [
-    model.communityName.normalize('NFC').trim(),
-    ...(figure.saysYear ? [] : [issueWords(model)]),
-  ].join(' · ');
   const moonsWidth = moonWords === '' ? 0 : measurer.widthMm(moonWords, LEGEND);
-  const room = area.right - (moonWords === '' ? area.left + NAME_WIDTH_MM : moonsLeft + moonsWidth + GAP_MM);
-  const placeWidth = Math.max(measurer.widthMm(place, LEGEND) <= room ? room : 0, LEAST_PLACE_MM);
+  const afterMoons = area.right - moonsLeft - moonsWidth - GAP_MM;
+  const placeWidth = Math.max(afterMoons, HEAD_NAME_MM);
+  const place = onOneLine(
+    [model.communityName, ...(figure.saysYear ? [] : [issueWords(model)])].join(' · '),
+    placeWidth,
+    LEGEND,
+    measurer,
+  );
+  const taken = measurer.widthMm(place, LEGEND);
   const columns = [
     { lines: wrapText(under, NAME_WIDTH_MM, LEGEND, measurer), x: area.left, align: 'left' as const },
     {
-      lines: wrapText(moonWords, area.right - placeWidth - GAP_MM - moonsLeft, LEGEND, measurer),
+      lines: wrapText(moonWords, area.right - taken - GAP_MM - moonsLeft, LEGEND, measurer),
       x: moonsLeft,
       align: 'left' as const,
     },
-    { lines: wrapText(place, placeWidth, LEGEND, measurer), x: area.right, align: 'right' as const },
+    { lines: [place], x: area.right, align: 'right' as const },
   ];
   for (const { lines, x, align } of columns) {
     if (lines.length > 0)

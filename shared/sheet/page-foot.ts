@@ -1,7 +1,7 @@
 import type { Primitive } from './primitives.js';
 import type { SheetModel } from './sheet-model.js';
 import { rule } from './strokes.js';
-import { leadingMm, textBlock, textUpward, wrapText } from './text-layout.js';
+import { fitStatements, leadingMm, textBlock, textUpward, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
 import { roundMm } from './units.js';
 
@@ -9,11 +9,15 @@ export const SCALE_BAR_MM = 100;
 export const DRILL_MM = 6;
 export const PEG_MM = 5;
 
+/** A village's name no wider than this stands whole in every head. */
+export const HEAD_NAME_MM = 40;
 const CAUTION: TextStyle = { role: 'legend', sizePt: 14, weight: 700 };
 export const FOOT: TextStyle = { role: 'foot', sizePt: 12, weight: 400, leadingEm: 1.28 };
 
 export interface PageFoot {
   readonly height: number;
+  /** Statements for which the foot had no room; they belong on another page. */
+  readonly leftOut: readonly string[];
   draw(top: number): Primitive[];
 }
 
@@ -48,13 +52,19 @@ export function barDown(
 }
 
 /** What every page says about itself, in the order in which it matters. `namesDawnOrDusk` adds the care for eyes. */
-export function footStatements(model: SheetModel, namesDawnOrDusk: boolean): string[] {
+export function footStatements(
+  model: SheetModel,
+  namesDawnOrDusk: boolean,
+  measurer: TextMeasurer,
+): string[] {
   const { words } = model;
   return [
     ...(namesDawnOrDusk ? [words.eyesCaution()] : []),
     words.contacts(model.contacts),
     ...model.basis,
     ...(model.signedBy.trim() === '' ? [] : [words.signedBy(model.signedBy)]),
+    // A head shortens a long name of the village; the foot has it whole.
+    ...(measurer.widthMm(model.communityName, CAUTION) > HEAD_NAME_MM ? [model.communityName] : []),
   ];
 }
 
@@ -69,17 +79,12 @@ export function pageFoot(
   model: SheetModel,
   area: { readonly left: number; readonly right: number },
   namesDawnOrDusk: boolean,
+  maxHeightMm: number,
   measurer: TextMeasurer,
 ): PageFoot {
   const { words } = model;
   const width = area.right - area.left;
   const caution = wrapText(words.shortCaution(), width, CAUTION, measurer);
-  const statements = wrapText(
-    [...footStatements(model, namesDawnOrDusk), words.printed(model.printDate)].join(' '),
-    width,
-    FOOT,
-    measurer,
-  );
   const across = wrapText(words.measureAcross(), width - SCALE_BAR_MM - 4, FOOT, measurer);
   const howToPrint = [words.fullSize(), words.pegAndDrill({ pegMm: PEG_MM, drillMm: DRILL_MM })].join(' ');
   const printWidth = Math.min(measurer.widthMm(howToPrint, FOOT), width * 0.66);
@@ -89,18 +94,23 @@ export function pageFoot(
     width - printWidth - 5,
     FOOT,
     measurer,
-  );
+  ).slice(0, 3);
   const line = leadingMm(FOOT);
   const cautionHeight = caution.length * leadingMm(CAUTION);
-  const statementsHeight = statements.length * line;
   const acrossHeight = Math.max(6, across.length * line);
+  const fixedHeight =
+    0.6 + cautionHeight + acrossHeight + Math.max(printLines.length, issueLines.length) * line;
+  const { lines: statements, leftOut } = fitStatements(
+    [...footStatements(model, namesDawnOrDusk, measurer), words.printed(model.printDate)],
+    width,
+    Math.max(1, Math.floor((maxHeightMm - fixedHeight) / line)),
+    FOOT,
+    measurer,
+  );
+  const statementsHeight = statements.length * line;
   return {
-    height:
-      0.6 +
-      cautionHeight +
-      statementsHeight +
-      acrossHeight +
-      Math.max(printLines.length, issueLines.length) * line,
+    height: fixedHeight + statementsHeight,
+    leftOut,
     draw: (top) => {
       const statementsTop = top + 0.6 + cautionHeight;
       const acrossTop = statementsTop + statementsHeight;

@@ -65,6 +65,8 @@ export interface SheetWords {
   shortCaution(): string;
   eyesCaution(): string;
   contacts(of: { weather: string; agriculture: string }): string;
+  /** Where a tile has no room for the contacts themselves. */
+  contactsElsewhere(): string;
   measureAcross(): string;
   measureDown(): string;
   fullSize(): string;

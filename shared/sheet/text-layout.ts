@@ -71,6 +71,43 @@ export function wrapText(text: string, widthMm: number, style: TextStyle, measur
   return lines;
 }
 
+/** Text on one line, its end left out with an ellipsis where it is too long. */
+export function onOneLine(text: string, widthMm: number, style: TextStyle, measurer: TextMeasurer): string {
+  const whole = text.normalize('NFC').replaceAll('\n', ' ');
+  if (measurer.widthMm(whole, style) <= widthMm) return whole;
+  const letters = Array.from(clusters.segment(whole), ({ segment }) => segment);
+  while (letters.length > 1 && measurer.widthMm(`${letters.join('').trimEnd()}…`, style) > widthMm)
+    letters.pop();
+  return `${letters.join('').trimEnd()}…`;
+}
+
+/**
+ * Whole statements as running text, in their order, as many as fit into the lines there are. A statement that
+ * does not fit is left out whole and named, never cut: half a telephone number helps nobody.
+ */
+export function fitStatements(
+  statements: readonly string[],
+  widthMm: number,
+  maxLines: number,
+  style: TextStyle,
+  measurer: TextMeasurer,
+): { readonly lines: string[]; readonly leftOut: string[] } {
+  let lines: string[] = [];
+  let text = '';
+  const leftOut: string[] = [];
+  for (const statement of statements) {
+    const longer = text === '' ? statement : `${text} ${statement}`;
+    const wrapped = wrapText(longer, widthMm, style, measurer);
+    if (wrapped.length > maxLines) {
+      leftOut.push(statement);
+      continue;
+    }
+    text = longer;
+    lines = wrapped;
+  }
+  return { lines, leftOut };
+}
+
 /** The village's words, then the officer's, on one line; one of them where they are the same or one is missing. */
 export function joinLabel(label: Label): string {
   const village = label.village.normalize('NFC').trim();
@@ -125,9 +162,11 @@ export function textOnBaseline(
     );
   }
   const em = style.sizePt * MM_PER_PT;
-  const above = (place.figures ? CAP_HEIGHT_EM : ASCENT_EM) * em;
-  const below = (place.figures ? 0.02 : DESCENT_EM) * em;
   const leading = leadingMm(style);
+  // Lines set closer than usual leave each other less room for marks.
+  const closer = Math.max(0, (ASCENT_EM + DESCENT_EM - leading / em) / 2);
+  const above = (place.figures ? CAP_HEIGHT_EM : ASCENT_EM - closer) * em;
+  const below = (place.figures ? 0.02 : DESCENT_EM - closer) * em;
   const laid = lines.map((text, index): TextLine => {
     const width = measurer.widthMm(text, style);
     const shift = place.align === 'right' ? width : place.align === 'middle' ? width / 2 : 0;

@@ -11,7 +11,7 @@ import {
 import type { Primitive } from './primitives.js';
 import type { SheetModel } from './sheet-model.js';
 import { clearing, straight } from './strokes.js';
-import { leadingMm, textBlock, textOnBaseline, textUpward, wrapText } from './text-layout.js';
+import { fitStatements, leadingMm, onOneLine, textBlock, textOnBaseline, textUpward } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
 import { roundMm } from './units.js';
 import { LEGEND_BOLD } from './word-block.js';
@@ -19,8 +19,8 @@ import { FLAP_MM, TILE_PAGE_HEIGHT_MM } from './year-tiles.js';
 import type { Tile } from './year-tiles.js';
 
 const CODE: TextStyle = { role: 'tile-code', sizePt: 24, weight: 700 };
-const TIGHT_FOOT: TextStyle = { ...FOOT, leadingEm: 1.2 };
-const TIGHT_CAUTION: TextStyle = { role: 'foot', sizePt: 12, weight: 700, leadingEm: 1.2 };
+const TIGHT_FOOT: TextStyle = { ...FOOT, leadingEm: 1.24 };
+const TIGHT_CAUTION: TextStyle = { role: 'foot', sizePt: 12, weight: 700, leadingEm: 1.24 };
 const HEAD_INSET_MM = 3;
 const BAR_DOWN_FROM_BOTTOM_MM = 103;
 const TEXT_RIGHT_MM = 286;
@@ -64,9 +64,9 @@ function head(model: SheetModel, tile: Tile, measurer: TextMeasurer): Primitive[
   const mapLeft = mapRight - 15;
   const arrowX = mapLeft - 8;
   const textWidth = arrowX - 4 - topWidth - 4 - left;
-  const titleLine = wrapText(title, textWidth, LEGEND_BOLD, measurer).slice(0, 1);
+  const titleLine = onOneLine(title, textWidth, LEGEND_BOLD, measurer);
   return [
-    textBlock(titleLine, { x: left, top: 8 }, LEGEND_BOLD, measurer),
+    textBlock([titleLine], { x: left, top: 8 }, LEGEND_BOLD, measurer),
     textBlock(fitting(second, textWidth, 1, measurer), { x: left, top: 14.9 }, TIGHT_FOOT, measurer),
     textOnBaseline([words.top()], { x: arrowX - 4, baseline: 18.6, align: 'right' }, FOOT, measurer),
     straight('arrow', { x: arrowX, y: 18.8 }, { x: arrowX, y: 9 }, 0.6),
@@ -82,23 +82,13 @@ function head(model: SheetModel, tile: Tile, measurer: TextMeasurer): Primitive[
   ];
 }
 
-/** Whole statements, in their order, as long as they fit into the lines there are. */
 function fitting(
   statements: readonly string[],
   widthMm: number,
   maxLines: number,
   measurer: TextMeasurer,
 ): string[] {
-  let lines: string[] = [];
-  let text = '';
-  for (const statement of statements) {
-    const longer = text === '' ? statement : `${text} ${statement}`;
-    const wrapped = wrapText(longer, widthMm, TIGHT_FOOT, measurer);
-    if (wrapped.length > maxLines) continue;
-    text = longer;
-    lines = wrapped;
-  }
-  return lines;
+  return fitStatements(statements, widthMm, maxLines, TIGHT_FOOT, measurer).lines;
 }
 
 function tileMap(tile: Tile, left: number): Primitive[] {
@@ -238,10 +228,14 @@ function foot(model: SheetModel, namesDawnOrDusk: boolean, measurer: TextMeasure
   const cautionWidth = measurer.widthMm(caution, TIGHT_CAUTION);
   const room = TEXT_RIGHT_MM - left - cautionWidth - 6;
   const contactsBeside = measurer.widthMm(contacts, TIGHT_FOOT) <= room;
-  const rest = footStatements(model, namesDawnOrDusk).filter((text) => !contactsBeside || text !== contacts);
+  const others = footStatements(model, namesDawnOrDusk, measurer).filter((text) => text !== contacts);
+  const width = TEXT_RIGHT_MM - left;
+  const contactsBelow = fitting([contacts], width, FOOT_LINES, measurer).length > 0;
+  const numbers = contactsBelow ? contacts : model.words.contactsElsewhere();
+  const rest = contactsBeside ? others : [numbers, ...others];
   return [
     textBlock(
-      wrapText(caution, TEXT_RIGHT_MM - left, TIGHT_CAUTION, measurer).slice(0, 1),
+      [onOneLine(caution, width, TIGHT_CAUTION, measurer)],
       { x: left, top },
       TIGHT_CAUTION,
       measurer,
@@ -250,7 +244,7 @@ function foot(model: SheetModel, namesDawnOrDusk: boolean, measurer: TextMeasure
       ? [textBlock([contacts], { x: TEXT_RIGHT_MM, top, align: 'right' }, TIGHT_FOOT, measurer)]
       : []),
     textBlock(
-      fitting(rest, TEXT_RIGHT_MM - left, FOOT_LINES, measurer),
+      fitting(rest, width, FOOT_LINES, measurer),
       { x: left, top: top + leadingMm(TIGHT_FOOT) },
       TIGHT_FOOT,
       measurer,

@@ -11,7 +11,7 @@ import type { Primitive, SheetPage } from './primitives.js';
 import type { SheetModel } from './sheet-model.js';
 import { spansOfMonth } from './spans.js';
 import { straight } from './strokes.js';
-import { capHeightMm, textBlock, textOnBaseline, wrapText } from './text-layout.js';
+import { capHeightMm, onOneLine, textBlock, textOnBaseline, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
 import { tileFrame } from './tile-frame.js';
 import { versionFigure } from './version-figure.js';
@@ -142,18 +142,15 @@ function monthLabel(model: SheetModel, tile: Tile, month: number, measurer: Text
   const top = rowTop(tile, month);
   const width = LABEL_COLUMN_MM - 4;
   const title = monthTitle(model, month, width, measurer);
-  const under = [title.other ?? '', holesOfMonth(model, month)].filter((part) => part !== '').join(' · ');
+  const holes = holesOfMonth(model, month);
+  const both = title.other === null ? holes : `${title.other} · ${holes}`;
+  const under = measurer.widthMm(both, FOOT) <= width ? both : onOneLine(holes, width, FOOT, measurer);
   const moons = model.moon
     .filter(({ date }) => date.startsWith(isoOf(model.year, month, 1).slice(0, 8)))
     .toSorted((a, b) => (a.date < b.date ? -1 : 1));
   return [
-    textOnBaseline([title.large], { x: left, baseline: top + 13.6 }, MONTH_NAME, measurer),
-    textBlock(
-      wrapText(under, width, FOOT, measurer).slice(0, 1),
-      { x: left, top: top + 18.4 },
-      FOOT,
-      measurer,
-    ),
+    textOnBaseline([title.large], { x: left, baseline: top + 14.6 }, MONTH_NAME, measurer),
+    textBlock([under], { x: left, top: top + 19.8 }, FOOT, measurer),
     ...moons.flatMap(({ phase, date }, index): Primitive[] => {
       const cx = left + 3.4 + index * 15;
       const cy = top + 31.4;

@@ -5,12 +5,12 @@ import type { Primitive, SheetPage } from './primitives.js';
 import type { SheetEntry, SheetMarker, SheetModel } from './sheet-model.js';
 import { entryStretches, markerRange, spansOfMonth, touchesYear } from './spans.js';
 import { rule, STROKE_MM } from './strokes.js';
-import { leadingMm, textBlock, wrapLabel, wrapText } from './text-layout.js';
+import { leadingMm, onOneLine, textBlock, wrapLabel, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
 import { roundMm } from './units.js';
 import { versionFigure } from './version-figure.js';
 import { watermarked } from './watermark.js';
-import { BLOCK_ICON_MM, flowBlocks, LEGEND, LEGEND_BOLD, tagMark } from './word-block.js';
+import { BLOCK_ICON_MM, flowBlocks, LEGEND, LEGEND_BOLD, plainBlock, tagMark } from './word-block.js';
 import type { WordBlock, WordRow } from './word-block.js';
 import { TILE_PAGE_HEIGHT_MM, TILE_PAGE_WIDTH_MM } from './year-tiles.js';
 
@@ -23,6 +23,7 @@ const IF_LATE = { left: 220, width: 66 };
 const HEAD_BOTTOM_MM = 32;
 const TITLE: TextStyle = { role: 'legend', sizePt: 22, weight: 700 };
 const TAG: TextStyle = { role: 'tag', sizePt: 20, weight: 700 };
+const MAX_FOOT_MM = 70;
 const AFTER_BLOCK_MM = 2.6;
 /** Markers are no events: their picture is smaller than board size. */
 const MARKER_ICON_MM = 12.5;
@@ -33,11 +34,12 @@ interface Line {
 }
 
 export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
-  const foot = pageFoot(model, AREA, model.markers.length > 0, measurer);
+  const foot = pageFoot(model, AREA, model.markers.length > 0, MAX_FOOT_MM, measurer);
   const footTop = TILE_PAGE_HEIGHT_MM - 8 - foot.height;
   const blocks = [
     ...model.markers.map((marker) => markerRow(model, marker, measurer)),
     ...model.entries.map((entry) => entryRow(model, entry, measurer)),
+    ...foot.leftOut.map((text) => plainBlock(text, LEGEND, AREA, measurer)),
   ];
   const spans = Array.from({ length: 12 }, (_, index) =>
     spansOfMonth(model.year, index + 1, model.markers, model.entries).map((span) => ({
@@ -59,12 +61,14 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
     const primitives: Primitive[] = [
       textBlock([name], { x: AREA.left, top: 8.5 }, TITLE, measurer),
       textBlock(
-        wrapText(
-          `${model.words.boardTitle({ community: model.communityName, issue: issueWords(model) })}`,
-          160,
-          LEGEND,
-          measurer,
-        ).slice(0, 2),
+        [
+          onOneLine(
+            model.words.boardTitle({ community: model.communityName, issue: issueWords(model) }),
+            160,
+            LEGEND,
+            measurer,
+          ),
+        ],
         { x: AREA.left, top: 19.5 },
         LEGEND,
         measurer,

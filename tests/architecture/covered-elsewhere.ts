@@ -2,4 +2,18 @@
  * Files of shared/ whose behaviour is held by a test at another place: the door they are used through says
  * more about them than a test of their own would.
  */
-export const coveredElsewhere: Readonly<Record<string, string>> = {};
+export const coveredElsewhere: Readonly<Record<string, string>> = {
+  'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
+  'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+  'shared/sheet/day-row.ts': 'tests/unit/shared/sheet/month-card.test.ts',
+  'shared/sheet/month-head.ts': 'tests/unit/shared/sheet/month-card.test.ts',
+  'shared/sheet/month-words.ts': 'tests/unit/shared/sheet/month-card.test.ts',
+  'shared/sheet/page-foot.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
+  'shared/sheet/strokes.ts': 'tests/unit/shared/sheet/page-paths.test.ts',
+  'shared/sheet/tile-frame.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+  'shared/sheet/units.ts': 'tests/unit/shared/sheet/page-paths.test.ts',
+  'shared/sheet/version-figure.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
+  'shared/sheet/watermark.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
+  'shared/sheet/year-legend.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+  'shared/sheet/year-tiles.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+};

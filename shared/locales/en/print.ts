@@ -68,6 +68,7 @@ export const texts = {
     caution: 'Stars tell the season, not the rain. Check soil and forecast first.',
     eyes: 'Look with bare eyes only and stop before the Sun shows; never point glass or a lens at it.',
     contacts: 'Weather service: {{weather}}. Agricultural office: {{agriculture}}.',
+    contactsElsewhere: 'The numbers to ask stand on the sheet beside the board.',
     missing: '______________',
     measureAcross: '100\u00a0mm across: measure me.',
     measureDown: '100\u00a0mm down: measure me',

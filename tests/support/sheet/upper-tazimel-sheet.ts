@@ -16,7 +16,7 @@ const fixed = i18n.getFixedT('en', 'print');
 
 /** English words as the server hands them out. A key without a text fails the test. */
 export const translate: PrintTranslator = (key, values) => {
-  const text = String(fixed(key, values ?? {}));
+  const text = fixed(key, values ?? {});
   if (text === key) throw new Error(`no English text for print:${key}`);
   return text;
 };
