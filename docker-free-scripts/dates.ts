@@ -3,7 +3,7 @@
 // thresholds exactly as given. A bad case gets {id, error} in its place and the exit code 2; the rest is answered.
 import { readFileSync } from 'node:fs';
 
-import { type CaseAnswer, answerCases, readCases } from './dates/answer-cases.js';
+import { type CaseAnswer, answerCases, readCases } from './lib/answer-cases.js';
 
 function complain(sentence: string): void {
   process.stderr.write(`${sentence}\n`);

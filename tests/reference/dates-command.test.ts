@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process';
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -17,12 +17,21 @@ interface Run {
   stderr: string;
 }
 
-function dates(...files: string[]): Promise<Run> {
+function run(command: string, args: string[]): Promise<Run> {
   return new Promise((resolve) => {
-    execFile('npm', ['run', '-s', 'dates', '--', ...files], { cwd: projectDir }, (error, stdout, stderr) => {
+    execFile(command, args, { cwd: projectDir }, (error, stdout, stderr) => {
       resolve({ code: typeof error?.code === 'number' ? error.code : 0, stdout, stderr });
     });
   });
+}
+
+/** What `npm run dates` runs, without the second that npm takes; one test goes through npm itself. */
+function dates(...files: string[]): Promise<Run> {
+  const { scripts } = JSON.parse(readFileSync(path.join(projectDir, 'package.json'), 'utf8')) as {
+    scripts: { dates: string };
+  };
+  const [command = '', ...args] = scripts.dates.split(' ');
+  return run(path.join(projectDir, 'node_modules/.bin', command), [...args, ...files]);
 }
 
 function fileOf(name: string, content: string): string {
@@ -60,15 +69,14 @@ describe('npm run -s dates', () => {
   let nothing: Run;
 
   beforeAll(async () => {
-    [reference, partly, missing, broken, wrongShape, nothing] = await Promise.all([
-      dates(fixturePath('reference-dates.json')),
-      dates(fileOf('mixed.json', JSON.stringify(mixed))),
-      dates(path.join(folder, 'not-there.json')),
-      dates(fileOf('broken.json', '{"cases": [')),
-      dates(fileOf('shape.json', '[]')),
-      dates(),
-    ]);
-  }, 60_000);
+    reference = await run('npm', ['run', '-s', 'dates', '--', fixturePath('reference-dates.json')]);
+    partly = await dates(fileOf('mixed.json', JSON.stringify(mixed)));
+    missing = await dates(path.join(folder, 'not-there.json'));
+    broken = await dates(fileOf('broken.json', '{"cases": ['));
+    wrongShape = await dates(fileOf('shape.json', '[]'));
+    nothing = await dates();
+    // A second each on a free machine.
+  }, 180_000);
   afterAll(() => rmSync(folder, { recursive: true }));
 
   it('answers the 60 reference cases in their order and in their own form', () => {

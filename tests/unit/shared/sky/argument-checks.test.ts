@@ -9,7 +9,7 @@ import {
   assertSite,
   assertYear,
 } from '#shared/sky/argument-checks.js';
-import type { DepthAtCrossingCase, Site, VisibilitySettings } from '#shared/sky/types.js';
+import type { DepthAtCrossingCase, Site } from '#shared/sky/types.js';
 import { SkyRangeError } from '#shared/sky/units/sky-range-error.js';
 import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
 
@@ -91,7 +91,7 @@ describe('arguments', () => {
     ['settings.clarityByMonth.0', { clarityByMonth: new Array(12).fill('foggy') }],
   ];
   it.each(badSettings)('of the settings are refused by name: %s', (field, part) => {
-    expect(complaint(() => assertSettings({ ...settingsWith(), ...part } as VisibilitySettings))).toBe(field);
+    expect(complaint(() => assertSettings({ ...settingsWith(), ...part }))).toBe(field);
   });
 
   const good = {
@@ -119,9 +119,8 @@ describe('arguments', () => {
   });
 
   it('of a case may hold a threshold of 0 and members that nobody asked for', () => {
-    expect(
-      complaint(() => assertQuestion({ ...good, outcome: 'never-sets' } as DepthAtCrossingCase)),
-    ).toBeNull();
+    const answered = { ...good, outcome: 'never-sets' };
+    expect(complaint(() => assertQuestion(answered))).toBeNull();
   });
 
   it('of the calendar are whole numbers', () => {

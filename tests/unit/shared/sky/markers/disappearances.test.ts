@@ -23,10 +23,11 @@ describe('disappearances', () => {
           if (!crossings) return;
           const { rising, setting } = crossings;
           const sine = Math.sin((marker.threshold.sameSideDeg * Math.PI) / 180);
-          const [before, after] = [setting, rising].map(({ reach }) => tooHighHalfArcRad(reach, sine));
+          const before = tooHighHalfArcRad(setting.reach, sine);
+          const after = tooHighHalfArcRad(rising.reach, sine);
           const evening = new Disappearances(marker, crossings).expected(0, 'heliacal-setting').jdUt;
           const morning = new Disappearances(marker, crossings).expected(0, 'heliacal-rising').jdUt;
-          if (before == null || after == null || evening === null || morning === null) return;
+          if (before === null || after === null || evening === null || morning === null) return;
           compared += 1;
           const travel = highestTravelRad(
             marker.year,

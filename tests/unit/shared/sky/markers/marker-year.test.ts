@@ -37,9 +37,9 @@ const result = (key: string, latitudeDeg: number, year = 2027): MarkerYear => {
   return markerYearOf(marker, marker.marker);
 };
 
-function numbersOf(crossing: Crossing): number[] {
-  const { gregorian, julian, ...rest } = crossing;
-  return [...Object.values(rest), ...Object.values(gregorian), ...Object.values(julian)].map(Number);
+function numbersOf({ gregorian, julian, ...rest }: Crossing): number[] {
+  const labels = [gregorian, julian].flatMap(({ year, month, day }) => [year, month, day]);
+  return [...Object.values(rest), ...labels];
 }
 
 describe('a marker’s year', () => {
