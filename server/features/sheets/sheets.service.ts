@@ -1,4 +1,5 @@
 import type { SheetPreview, SheetQuery } from '#shared/contracts/sheets.js';
+import type { Signature } from '#shared/contracts/versions.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import type { SheetModel } from '#shared/sheet/sheet-model.js';
 import type { Actor } from '../../http/actor.js';
@@ -60,12 +61,22 @@ export class SheetsService {
         entries,
         state,
         label,
-        signerNames: signatures.map(({ displayName }) => displayName),
+        signerNames: signerNames(signatures),
         printDate: civilDateAt(this.clock.now(), header.place),
       },
       query,
     );
   }
+}
+
+/** Elders by name, then the steward: the same order on every print. */
+function signerNames(signatures: readonly Signature[]): string[] {
+  const namesOf = (role: Signature['role']) =>
+    signatures
+      .filter((signature) => signature.role === role)
+      .map(({ displayName }) => displayName)
+      .sort();
+  return [...namesOf('elder'), ...namesOf('steward')];
 }
 
 /** `Upper Tazimel 2027-1 month cards.pdf` */
