@@ -25,8 +25,15 @@ export function createQueryClient(): QueryClient {
     queryCache: new QueryCache({ onError }),
     mutationCache: new MutationCache({ onError }),
     defaultOptions: {
-      queries: { retry: worthRetrying, staleTime: MINUTE_MS, gcTime: 30 * MINUTE_MS },
-      mutations: { retry: false },
+      // 'always': without a network a call fails at once and says so, instead of waiting without a word.
+      queries: {
+        networkMode: 'always',
+        refetchOnReconnect: true,
+        retry: worthRetrying,
+        staleTime: MINUTE_MS,
+        gcTime: 30 * MINUTE_MS,
+      },
+      mutations: { networkMode: 'always', retry: false },
     },
   });
   return client;

@@ -27,7 +27,7 @@ export interface MastProps {
 export const MastEnd = createContext<ReactNode>(null);
 
 /** The first screen after loading is read from its start anyway; only a change of screen moves the focus. */
-let firstScreenIsOpen = false;
+let firstHeading: HTMLHeadingElement | null = null;
 
 /** Head of a screen. Its heading takes the focus when the screen opens, so that it is read first. */
 export function Mast({ title, under, backTo, children }: MastProps) {
@@ -35,8 +35,8 @@ export function Mast({ title, under, backTo, children }: MastProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   const mastEnd = useContext(MastEnd);
   useEffect(() => {
-    const isFirst = !firstScreenIsOpen;
-    firstScreenIsOpen = true;
+    firstHeading ??= heading.current;
+    const isFirst = heading.current === firstHeading;
     // Never pull a person out of a field of the new screen.
     const holdsFocus = document.activeElement?.closest('main') instanceof HTMLElement;
     if (!isFirst && !holdsFocus) heading.current?.focus({ preventScroll: true });

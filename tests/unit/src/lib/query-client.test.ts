@@ -1,3 +1,4 @@
+import { onlineManager } from '@tanstack/react-query';
 import { describe, expect, it } from 'vitest';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { createQueryClient, SESSION_KEY, worthRetrying } from '#src/lib/query-client.js';
@@ -45,5 +46,22 @@ describe('a session that has ended', () => {
     const queryFn = () => Promise.reject(problem(403));
     await expect(client.query({ queryKey: ['places'], queryFn })).rejects.toBeInstanceOf(ApiProblem);
     expect(client.getQueryState(SESSION_KEY)?.isInvalidated).toBe(false);
+  });
+});
+
+describe('without a network', () => {
+  it('a write fails at once and can say so, instead of waiting for the network', async () => {
+    onlineManager.setOnline(false);
+    try {
+      const client = createQueryClient();
+      const offline = new ApiProblem({ slug: 'offline', status: 0, detail: '' });
+      const write = client.getMutationCache().build(client, {
+        ...client.getDefaultOptions().mutations,
+        mutationFn: () => Promise.reject(offline),
+      });
+      await expect(write.execute(undefined)).rejects.toBe(offline);
+    } finally {
+      onlineManager.setOnline(true);
+    }
   });
 });
