@@ -47,7 +47,7 @@ export function assertYear(year: unknown, field = 'year'): asserts year is numbe
   }
 }
 
-export function assertLatitude(value: unknown, field: string): void {
+function assertLatitude(value: unknown, field: string): void {
   assertNumber(field, value, -90, 90, 'degrees, north positive');
 }
 
