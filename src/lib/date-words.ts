@@ -26,6 +26,8 @@ export interface DateWords {
   between: (from: AnyDay, to: AnyDay, form?: DayForm) => string;
   /** `About 7 June, between 3 and 12 June`; says so where an end of the range has no date. */
   aboutBetween: (expected: AnyDay, early: AnyDay | null, late: AnyDay | null) => string;
+  /** The same for the middle of a sentence: `about 7 June, between 3 and 12 June`. */
+  aboutWithin: (expected: AnyDay, early: AnyDay | null, late: AnyDay | null) => string;
   /** `2027`, `44 BC` for −43. */
   year: (astronomicalYear: number) => string;
   /** `18:40` today, `yesterday, 18:40`, `7 June, 18:40` before that. */
@@ -78,19 +80,24 @@ export function dateWords(t: TFunction, language: string): DateWords {
         ? day(to, form)
         : t(key, { from: firstOfPair(from, to, form), to: day(to, form) });
 
+  const about =
+    (where: 'date' | 'date.within') => (expected: AnyDay, early: AnyDay | null, late: AnyDay | null) => {
+      const middle = day(expected);
+      if (early !== null && late !== null) {
+        const from = firstOfPair(early, late, 'long');
+        return t(`${where}.aboutBetween`, { day: middle, from, to: day(late) });
+      }
+      if (late !== null) return t(`${where}.aboutNotAfter`, { day: middle, to: day(late) });
+      if (early !== null) return t(`${where}.aboutNotBefore`, { day: middle, from: day(early) });
+      return t(`${where}.aboutOpen`, { day: middle });
+    };
+
   return {
     day,
     range: pair('date.range'),
     between: pair('date.between'),
-    aboutBetween: (expected, early, late) => {
-      const middle = day(expected);
-      if (early !== null && late !== null) {
-        return t('date.aboutBetween', { day: middle, from: firstOfPair(early, late, 'long'), to: day(late) });
-      }
-      if (late !== null) return t('date.aboutNotAfter', { day: middle, to: day(late) });
-      if (early !== null) return t('date.aboutNotBefore', { day: middle, from: day(early) });
-      return t('date.aboutOpen', { day: middle });
-    },
+    aboutBetween: about('date'),
+    aboutWithin: about('date.within'),
     year: (year) => (year > 0 ? String(year) : t('date.yearBc', { year: 1 - year })),
     moment: (instant, now = new Date()) => momentWords(t, locale, new Date(instant), now),
     months: (year) =>

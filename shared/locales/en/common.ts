@@ -60,6 +60,12 @@ export const texts = {
     about: 'about {{day}}',
     between: 'between {{from}} and {{to}}',
     aboutBetween: 'About {{day}}, between {{from}} and {{to}}',
+    within: {
+      aboutBetween: 'about {{day}}, between {{from}} and {{to}}',
+      aboutNotAfter: 'about {{day}}, no later than {{to}}',
+      aboutNotBefore: 'about {{day}}, no earlier than {{from}}',
+      aboutOpen: 'about {{day}}; how much earlier or later cannot be told',
+    },
     aboutNotAfter: 'About {{day}}, no later than {{to}}',
     aboutNotBefore: 'About {{day}}, no earlier than {{from}}',
     aboutOpen: 'About {{day}}; how much earlier or later cannot be told',

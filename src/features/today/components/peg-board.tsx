@@ -44,7 +44,7 @@ export function PegBoard({ today }: { today: Today }) {
             {t('today:peg.mayShow', {
               marker: markerName(coming.marker),
               phenomenon: t(`sky:phenomenon.${coming.phenomenon}`),
-              between: words.aboutBetween(
+              between: words.aboutWithin(
                 coming.occurrence.expected.gregorian,
                 coming.occurrence.early?.gregorian ?? null,
                 coming.occurrence.late?.gregorian ?? null,

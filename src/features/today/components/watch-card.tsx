@@ -62,7 +62,7 @@ export function WatchCard({
       <p>
         {t('today:watch.expected', {
           phenomenon: t(`sky:phenomenonTitle.${phenomenon}`),
-          aboutBetween: words.aboutBetween(
+          aboutBetween: words.aboutWithin(
             expected.gregorian,
             occurrence.early?.gregorian ?? null,
             occurrence.late?.gregorian ?? null,

@@ -67,6 +67,14 @@ describe('a range in words', () => {
   });
 });
 
+describe('a range within a sentence', () => {
+  it('begins with a small letter', () => {
+    expect(words.aboutWithin('2027-06-07', '2027-06-03', null).replaceAll(NBSP, ' ')).toBe(
+      'about 7 June, no earlier than 3 June',
+    );
+  });
+});
+
 describe('a moment in words', () => {
   const now = new Date(2027, 5, 7, 20, 0);
   it('is a time today, then yesterday, then a date', () => {
