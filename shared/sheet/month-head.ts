@@ -15,8 +15,8 @@ const FIGURE_BASELINE_MM = 29.2;
 const NAME_BASELINE_MM = 26.4;
 const SECOND_LINE_MM = 31.6;
 const NAME_WIDTH_MM = 76;
-const MOON_PITCH_MM = 11.6;
-const MOON_RADIUS_MM = 4.4;
+const MOON_PITCH_MM = 10.8;
+const MOON_RADIUS_MM = 4.2;
 const GAP_MM = 3;
 
 export interface HeadArea {
@@ -84,20 +84,18 @@ export function cardHead(
 
   const under = [title?.other ?? '', second].filter((part) => part !== '').join(' · ');
   const moonWords = moons.length === 0 ? '' : model.words.moonPhases(moons.map(({ phase }) => phase));
-  const moonsWidth = moonWords === '' ? 0 : measurer.widthMm(moonWords, LEGEND);
-  const afterMoons = area.right - moonsLeft - moonsWidth - GAP_MM;
-  const placeWidth = Math.max(afterMoons, HEAD_NAME_MM);
+  // The village's name comes first; the Moons speak for themselves where their words have no room beside it.
   const place = onOneLine(
     [model.communityName, ...(figure.saysYear ? [] : [issueWords(model)])].join(' · '),
-    placeWidth,
+    Math.max(area.right - moonsLeft, HEAD_NAME_MM),
     LEGEND,
     measurer,
   );
-  const taken = measurer.widthMm(place, LEGEND);
+  const forMoons = area.right - measurer.widthMm(place, LEGEND) - GAP_MM - moonsLeft;
   const columns = [
     { lines: wrapText(under, NAME_WIDTH_MM, LEGEND, measurer), x: area.left, align: 'left' as const },
     {
-      lines: wrapText(moonWords, area.right - taken - GAP_MM - moonsLeft, LEGEND, measurer),
+      lines: moonWords !== '' && measurer.widthMm(moonWords, LEGEND) <= forMoons ? [moonWords] : [],
       x: moonsLeft,
       align: 'left' as const,
     },

@@ -10,7 +10,7 @@ export const DRILL_MM = 6;
 export const PEG_MM = 5;
 
 /** A village's name no wider than this stands whole in every head. */
-export const HEAD_NAME_MM = 40;
+export const HEAD_NAME_MM = 75;
 const CAUTION: TextStyle = { role: 'legend', sizePt: 14, weight: 700 };
 export const FOOT: TextStyle = { role: 'foot', sizePt: 12, weight: 400, leadingEm: 1.28 };
 

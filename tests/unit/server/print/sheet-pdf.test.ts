@@ -1,4 +1,4 @@
-import { beforeAll, describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it, vi } from 'vitest';
 import {
   layoutSheetForServer,
   pdfAbout,
@@ -13,6 +13,9 @@ import type { PdfPageContent } from '#tests/support/pdf/pdf-content.js';
 import { readPdfFonts, readPdfText, readPdfTitle } from '#tests/support/pdf/read-text.js';
 import { rings } from '#tests/support/sheet/page-checks.js';
 import { entry, upperTazimel, words } from '#tests/support/sheet/upper-tazimel-sheet.js';
+
+// Drawing a whole year takes a while on a busy machine.
+vi.setConfig({ testTimeout: 60_000, hookTimeout: 60_000 });
 
 const LAYOUTS = ['month-cards', 'year-board'] as const;
 /** Three decimals of a point in the file are a third of a micrometre. */
@@ -29,7 +32,7 @@ describe.each(LAYOUTS)('the PDF of %s', (layout) => {
     laidOut = layoutSheetForServer(model);
     file = await renderPages(laidOut, pdfAbout(model));
     pages = readPdfPages(file);
-  }, 60_000);
+  });
 
   it('has the sizes of its paper and as many pages as were laid out', () => {
     expect(pages.map((page) => [round(page.widthMm), round(page.heightMm)])).toEqual(
@@ -103,7 +106,7 @@ describe.each(LAYOUTS)('the PDF of %s', (layout) => {
     expect((await renderSheetPdf(model)).equals(file)).toBe(true);
     const later = await renderSheetPdf({ ...model, printDate: '2027-01-16' });
     expect(later.equals(file)).toBe(false);
-  }, 60_000);
+  });
 
   it('dashes 29 February and nothing else in a leap year', async () => {
     const leap = upperTazimel({
@@ -119,7 +122,7 @@ describe.each(LAYOUTS)('the PDF of %s', (layout) => {
       .filter(({ radius }) => Math.abs(radius - 3) < FILE_MM);
     expect(found).toHaveLength(366);
     expect(found.filter(({ isDashed }) => isDashed)).toHaveLength(1);
-  }, 60_000);
+  });
 
   it('says that it is a draft on every page', async () => {
     const draft = await renderSheetPdf(upperTazimel({ layout, label: null, stateWatermark: 'In review' }));
