@@ -65,7 +65,7 @@ function PageText({ text }: { text: TextPrimitive }) {
           key={index}
           x={line.x}
           y={line.baseline}
-          fontFamily="Andika, sans-serif"
+          fontFamily="var(--font-board)"
           fontSize={text.sizePt * MM_PER_PT}
           fontWeight={text.weight}
           fill={outlined ? 'none' : text.paint === 'paper' ? COLOURS.paper : COLOURS.ink}
