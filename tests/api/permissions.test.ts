@@ -1,0 +1,238 @@
+import { readFileSync } from 'node:fs';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { PlaceEntity } from '#server/db/entities/place.entity.js';
+import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
+import { ENDPOINTS } from '#shared/contracts/index.js';
+import { ROLES, type AddedPerson, type Community, type Role } from '#shared/contracts/people.js';
+import type { Place } from '#shared/contracts/places.js';
+import { DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
+import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import {
+  addEntry,
+  beginCalendar,
+  entryInput,
+  openVillage,
+  publishDraft,
+  says,
+  submit,
+} from '#tests/support/calendar-api.js';
+import { PERMISSION_GUIDE, withPermissionTable } from '../../docker-free-scripts/lib/permission-table.js';
+
+/**
+ * Every endpoint of the contracts, called by a visitor and by somebody of each role, in their own village and in
+ * another one. What must come of it follows from the access rules in the contracts alone.
+ */
+type Verdict = 'let in' | 'sign in first' | 'not allowed' | 'not found' | `broken: ${number}`;
+
+/** Ids of one village that really exist, so that a call that is let in reaches the service. */
+interface Village {
+  community: Community;
+  place: Place;
+  calendarId: string;
+  entryId: string;
+  personId: string;
+  elderId: string;
+  /** A published version, which everybody of the village sees, and one that is in review. */
+  publishedNumber: number;
+  reviewedNumber: number;
+}
+
+let api: TestApi;
+let own: Village;
+let other: Village;
+let clients: Record<Role, Client>;
+beforeAll(async () => {
+  api = await openTestApi();
+  clients = {
+    steward: await api.signIn('steward'),
+    officer: await api.signIn('officer'),
+    elder: await api.signIn('elder3'),
+    staff: await api.signIn('staff'),
+    observer: await api.signIn('observer'),
+  };
+  own = await furnishOwn();
+  other = await furnishOther();
+}, 60_000);
+afterAll(() => api.close());
+
+describe('who may call what', () => {
+  it.each(ENDPOINTS.map((endpoint) => [`${endpoint.method} ${endpoint.path}`, endpoint] as const))(
+    '%s lets in whom the contracts name, in the own village',
+    async (_name, endpoint) => {
+      const verdicts: Record<string, Verdict> = { visitor: await call(endpoint, null, own) };
+      for (const role of ROLES) verdicts[role] = await call(endpoint, role, own);
+      expect(verdicts).toEqual(expectedVerdicts(endpoint));
+    },
+  );
+
+  it.each(
+    ENDPOINTS.filter(({ access }) => access.kind === 'member').map(
+      (endpoint) => [`${endpoint.method} ${endpoint.path}`, endpoint] as const,
+    ),
+  )('%s is not there in another village, whatever the role', async (_name, endpoint) => {
+    const verdicts: Record<string, Verdict> = { visitor: await call(endpoint, null, other) };
+    for (const role of ROLES) verdicts[role] = await call(endpoint, role, other);
+    expect(verdicts).toEqual({
+      visitor: 'sign in first',
+      ...Object.fromEntries(ROLES.map((role) => [role, 'not found'])),
+    });
+  });
+
+  it('is shown in the guide exactly as the contracts say it (npm run permissions -- --write)', () => {
+    const guide = readFileSync(PERMISSION_GUIDE, 'utf8');
+    expect(guide === withPermissionTable(guide)).toBe(true);
+  });
+});
+
+function expectedVerdicts({ access }: Endpoint): Record<string, Verdict> {
+  const admits = (role: Role) => access.kind !== 'member' || access.roles.includes(role);
+  return {
+    visitor: access.kind === 'public' ? 'let in' : 'sign in first',
+    ...Object.fromEntries(ROLES.map((role) => [role, admits(role) ? 'let in' : 'not allowed'])),
+  };
+}
+
+async function call(endpoint: Endpoint, role: Role | null, village: Village): Promise<Verdict> {
+  const client = await clientFor(endpoint, role);
+  const path = fillPath(endpoint.path, paramsOf(endpoint, village)) + queryOf(endpoint, village);
+  const body = endpoint.body === undefined ? undefined : bodyOf(endpoint, role, village);
+  const answer = await {
+    GET: () => client.get(path),
+    POST: () => client.post(path, body),
+    PUT: () => client.put(path, body),
+    DELETE: () => client.delete(path),
+    PATCH: () => Promise.reject(new Error('no endpoint patches')),
+  }[endpoint.method]();
+  const { type } = answer.body as { type?: string };
+  if (type === '/problems/not-signed-in') return 'sign in first';
+  if (type === '/problems/not-allowed') return 'not allowed';
+  if (answer.status === 404) return 'not found';
+  return answer.status >= 500 || answer.status === 403 ? `broken: ${answer.status}` : 'let in';
+}
+
+/** Signing in and out changes a browser for good, so whoever may be anybody calls from a fresh one. */
+async function clientFor({ access }: Endpoint, role: Role | null): Promise<Client> {
+  if (role === null) return api.visitor();
+  return access.kind === 'public' ? api.signIn(role) : clients[role];
+}
+
+function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> {
+  const reviewed = new Set([
+    'askChanges',
+    'publishVersion',
+    'listAnswers',
+    'putAnswer',
+    'takeBackAnswer',
+    'letDifferenceStand',
+    'signVersion',
+  ]);
+  return {
+    communityId: village.community.id,
+    placeId: village.place.id,
+    calendarId: village.calendarId,
+    entryId: village.entryId,
+    personId: village.personId,
+    markerKey: 'pleiades',
+    number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
+  };
+}
+
+function queryOf(endpoint: Endpoint, { publishedNumber }: Village): string {
+  const queries: Record<string, string> = {
+    findTimeZone: '?latitudeDeg=12&longitudeDeg=39',
+    listStars: '?year=2027',
+    exportStarsCsv: '?year=2027',
+    readStar: '?year=2027',
+    listSkylineEffects: '?year=2027',
+    compareVersions: `?from=${publishedNumber}&to=${publishedNumber}`,
+  };
+  return queries[endpoint.id] ?? '';
+}
+
+/** Well-formed, so that only the gate can stop them; an old version number keeps most from changing anything. */
+function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object {
+  const { id: _id, version: _version, ...settings } = village.community;
+  const { id: _placeId, communityId: _communityId, version: _placeVersion, ...place } = village.place;
+  const stale = { version: 999 };
+  const speaksForAnElder = role === 'officer' || role === 'steward';
+  const bodies: Record<string, () => object> = {
+    signIn: () => ({ email: 'observer@dawnpeg.example', password: DEMO_PASSWORD }),
+    changePassword: () => ({ currentPassword: 'not mine', newPassword: 'never comes to be' }),
+    redeemCode: () => ({ email: 'a@example.org', code: 'ABCD-EFGH-JKMN', newPassword: 'never comes to be' }),
+    setUpFirstSteward: () => ({
+      token: 'there is no such token',
+      email: 'a@example.org',
+      displayName: 'A',
+      newPassword: 'never comes to be',
+      communityName: 'Nowhere',
+    }),
+    updateCommunity: () => ({ ...settings, ...stale }),
+    addPerson: () => ({ email: 'new@example.org', displayName: 'New', roles: ['observer'] }),
+    updatePerson: () => ({ roles: ['observer'], ...stale }),
+    createPlace: () => place,
+    updatePlace: () => ({ ...place, ...stale }),
+    previewSkylineEffects: () => ({ place, year: 2027 }),
+    createCalendar: () => ({ placeId: village.place.id, year: 2031 }),
+    addEntry: () => entryInput(),
+    updateEntry: () => ({ content: entryInput(), ...stale }),
+    reorderEntries: () => ({ entryIds: [village.entryId] }),
+    askChanges: () => ({ reason: 'taken-back', note: '' }),
+    recallVersion: () => ({ note: 'A wrong date' }),
+    putAnswer: () => (speaksForAnElder ? says({ onBehalfOf: village.elderId, witness: 'Tirel' }) : says()),
+    signVersion: () => ({ role: role === 'steward' ? 'steward' : 'elder' }),
+  };
+  const make = bodies[endpoint.id];
+  if (!make) throw new Error(`Say in this test what ${endpoint.id} is sent.`);
+  return make();
+}
+
+/** Version 1 published, version 2 in review with an elder's answer, and a guest who may be sent away. */
+async function furnishOwn(): Promise<Village> {
+  const village = await openVillage(api);
+  const calendar = await beginCalendar(village);
+  const entry = await addEntry(village.officer, calendar.id);
+  const published = await publishDraft(village, calendar.id);
+  await addEntry(village.officer, calendar.id, { titleOfficer: 'Weed' });
+  const reviewed = await submit(village.officer, calendar.id);
+  const answered = `/api/calendars/${calendar.id}/versions/2/entries/${entry.id}/answer`;
+  await clients.elder.put(answered, says({ answer: 'change-this', note: 'Later' })).expect(200);
+  const guest = { email: 'guest@example.org', displayName: 'Guest', roles: ['observer'] };
+  const people = `/api/communities/${village.steward.communityId}/people`;
+  const added = (await village.steward.post(people, guest).expect(201)).body as AddedPerson;
+  return {
+    ...(await homeOf(village.officer)),
+    calendarId: calendar.id,
+    entryId: entry.id,
+    personId: added.person.id,
+    elderId: village.elder.personId,
+    publishedNumber: published.number,
+    reviewedNumber: reviewed.number,
+  };
+}
+
+/** The second village; its officer alone can sign in, so its version stays in review. */
+async function furnishOther(): Promise<Village> {
+  const officer = await api.signIn('officer2');
+  const home = await homeOf(officer);
+  const calendar = await beginCalendar({ ...(await openVillage(api)), officer, placeId: home.place.id });
+  const entry = await addEntry(officer, calendar.id);
+  const { number } = await submit(officer, calendar.id);
+  return {
+    ...home,
+    calendarId: calendar.id,
+    entryId: entry.id,
+    personId: officer.personId,
+    elderId: home.community.signOffRule.mustSign[0] ?? '',
+    publishedNumber: number,
+    reviewedNumber: number,
+  };
+}
+
+async function homeOf(officer: Client): Promise<{ community: Community; place: Place }> {
+  const { communityId } = officer;
+  const row = await api.dataSource.getRepository(PlaceEntity).findOneByOrFail({ communityId });
+  return {
+    community: (await officer.get(`/api/communities/${communityId}`).expect(200)).body as Community,
+    place: (await officer.get(`/api/places/${row.id}`).expect(200)).body as Place,
+  };
+}
