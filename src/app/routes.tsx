@@ -37,6 +37,12 @@ export const villageRoutes: readonly AppRoute[] = [
     load: () => import('./routes/village-places.js'),
   },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
+  {
+    path: PATTERNS.calendar,
+    texts: ['calendars', 'versions', 'sky'],
+    load: () => import('./routes/calendar.js'),
+  },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,

@@ -32,7 +32,7 @@ export function useEntryFacts(): EntryFacts {
   return useMemo(() => {
     const told = (facts: Fact[]) => facts.filter(({ value }) => value !== '');
     const when = (content: EntryInput, dates: EntryDates | null, year: number, markers: NamesByKey) => [
-      { key: 'lead', label: t('form.goesBy'), value: entryWords.lead(content, markers) },
+      { key: 'lead', label: t('form.goesBy'), value: entryWords.leadAlone(content, markers) },
       { key: 'sign', label: t('form.theSign'), value: dates?.marker ? markerDays.about(dates.marker) : '' },
       {
         key: 'days',

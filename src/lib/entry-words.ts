@@ -1,6 +1,6 @@
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { EntryInput, EntryWindow } from '#shared/contracts/calendars.js';
+import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
 import type { MarkerNames } from '#shared/contracts/stars.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { useDateWords } from './date-words.js';
@@ -33,6 +33,8 @@ export interface EntryWords {
   windowSentence: (window: EntryWindow) => string;
   /** `Goes by Pleiades: first morning seen`. */
   lead: (content: Pick<EntryInput, 'lead'>, markers: NamesByKey) => string;
+  /** The same beside its own label: `Pleiades: first morning seen`. */
+  leadAlone: (content: Pick<EntryInput, 'lead'>, markers: NamesByKey) => string;
 }
 
 /** Year that stands for any in "5 July": a day of every year has no 29 February. */
@@ -41,8 +43,20 @@ const ANY_YEAR = 2027;
 export function useEntryWords(): EntryWords {
   const { t } = useTranslation(['calendars', 'sky']);
   const dates = useDateWords();
-  return useMemo(
-    () => ({
+  return useMemo(() => {
+    const leadWords = (group: 'lead' | 'leadAlone', lead: EntryLead, markers: NamesByKey) => {
+      if (lead.type === 'fixed-date') {
+        const day = dates.day({ year: ANY_YEAR, ...lead.date });
+        return t(`${group}.fixed`, { day, source: lead.source });
+      }
+      if (lead.markerKey === '') return t(`${group}.none`);
+      const names = markers.get(lead.markerKey);
+      return t(`${group}.${lead.occurrence === 2 ? 'markerSecond' : 'marker'}`, {
+        marker: names ? markerName(names) : lead.markerKey,
+        phenomenon: t(`sky:phenomenon.${lead.phenomenon}`),
+      });
+    };
+    return {
       window: ({ protectiveWatch }, window, year) => {
         if (window === null) return t('days.none', { year });
         const { earliest, bestFrom, bestTo, lastAdvised } = window;
@@ -58,19 +72,8 @@ export function useEntryWords(): EntryWords {
           bestTo: dates.day(window.bestTo),
           lastAdvised: dates.day(window.lastAdvised),
         }),
-      lead: ({ lead }, markers) => {
-        if (lead.type === 'fixed-date') {
-          const day = dates.day({ year: ANY_YEAR, ...lead.date });
-          return t('lead.fixed', { day, source: lead.source });
-        }
-        if (lead.markerKey === '') return t('lead.none');
-        const names = markers.get(lead.markerKey);
-        return t(lead.occurrence === 2 ? 'lead.markerSecond' : 'lead.marker', {
-          marker: names ? markerName(names) : lead.markerKey,
-          phenomenon: t(`sky:phenomenon.${lead.phenomenon}`),
-        });
-      },
-    }),
-    [t, dates],
-  );
+      lead: ({ lead }, markers) => leadWords('lead', lead, markers),
+      leadAlone: ({ lead }, markers) => leadWords('leadAlone', lead, markers),
+    };
+  }, [t, dates]);
 }

@@ -64,6 +64,12 @@ export const texts = {
     fixed: 'Goes by a fixed date: {{day}}, {{source}}',
     none: 'Goes by nothing yet',
   },
+  leadAlone: {
+    marker: '{{marker}}: {{phenomenon}}',
+    markerSecond: '{{marker}}: {{phenomenon}}, the second time in the year',
+    fixed: 'a fixed date: {{day}}, {{source}}',
+    none: 'nothing yet',
+  },
 
   list: {
     title: 'Calendars',
@@ -274,16 +280,15 @@ export const texts = {
     inUse: 'in this calendar',
     showing_one: 'Showing {{count}} of {{total}}. Another letter narrows the list.',
     showing_other: 'Showing {{count}} of {{total}}. Another letter narrows the list.',
+    found_one: '{{count}} fits.',
+    found_other: '{{count}} fit.',
     none: 'No star or figure fits these letters.',
-    morning: 'Morning of about {{day}}, {{range}}',
-    evening: 'Evening of about {{day}}, {{range}}',
+    dayOf: '{{phenomenon}}: {{days}}',
     neverSets: 'Never sets here: it has no first or last day.',
     neverClears: 'Never seen from this place.',
     neverDark: 'The nights are too light for this day.',
     notThisYear: 'Not in {{year}}',
     twice: '{{first}}; again {{second}}',
-    brightness: 'magnitude {{mag}}',
-    trouble: 'The stars could not be brought up',
   },
 
   warning: {

@@ -1,6 +1,6 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { Plus } from 'lucide-react';
-import { Controller, useForm } from 'react-hook-form';
+import { Controller, useForm, useWatch } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import { Link, useNavigate } from 'react-router-dom';
 import {
@@ -65,7 +65,7 @@ function BeginForm({
     defaultValues: { placeId: place.id, year: firstFreeYear(calendars, place) },
   });
   const problems = useFormProblems(form, FIELDS);
-  const [placeId, year] = form.watch(['placeId', 'year']);
+  const [placeId, year] = useWatch({ control: form.control, name: ['placeId', 'year'] });
   const existing = calendars.find((each) => each.placeId === placeId && each.year === year);
   return (
     <form

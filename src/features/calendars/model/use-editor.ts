@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import type { Calendar, Entry } from '#shared/contracts/calendars.js';
+import type { VersionSummary } from '#shared/contracts/versions.js';
 import { answersQuery, communityQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { entriesQuery, markersQuery } from '../api/calendars-queries.js';
 import { answersByEntry, type EntryAnswers } from './elder-requests.js';
@@ -58,7 +59,8 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
     stale: selected !== null && isStale(selected.saved, edit),
     orphans: canWrite && entries.isSuccess ? orphans(saved, writing) : [],
     answers: answers.byEntry,
-    lastNumber: answers.lastNumber,
+    lastNumber: answers.newest?.number ?? null,
+    lastState: answers.newest?.state ?? null,
     unsavedIds: shown.filter((entry) => entry.unsaved).map((entry) => entry.id),
   };
 }
@@ -67,7 +69,7 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
 function useEntryAnswers(
   calendarId: string,
   saved: readonly Entry[],
-): { byEntry: ReadonlyMap<string, EntryAnswers>; lastNumber: number | null } {
+): { byEntry: ReadonlyMap<string, EntryAnswers>; newest: VersionSummary | null } {
   const versions = useQuery(versionsQuery(calendarId));
   const newest = versions.data?.[0] ?? null;
   const lastNumber = newest?.number ?? null;
@@ -81,5 +83,5 @@ function useEntryAnswers(
       new Map(saved.map(({ id, content }) => [id, content])),
     );
   }, [version.data, answers.data, saved]);
-  return { byEntry, lastNumber };
+  return { byEntry, newest };
 }

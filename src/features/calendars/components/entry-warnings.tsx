@@ -1,0 +1,80 @@
+import { useTranslation } from 'react-i18next';
+import type { EntryWarning } from '#shared/contracts/calendars.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { listWords } from '#src/lib/list-words.js';
+import { markerName } from '#src/lib/marker-names.js';
+import { Button } from '#src/ui/button.js';
+import { Care } from '#src/ui/surfaces.js';
+import { leadingRow, type FormState } from '../model/form-state.js';
+import type { ShownEntry } from '../model/preview-dates.js';
+import { collidingWith, waysOut, type Way } from '../model/warning-ways.js';
+
+interface EntryWarningsProps {
+  form: FormState;
+  entry: ShownEntry;
+  all: readonly ShownEntry[];
+  onWay: (way: Way) => void;
+}
+
+/** What to look at before elders are asked: why, and ways out. None of it keeps the draft from being saved. */
+export function EntryWarnings({ form, entry, all, onWay }: EntryWarningsProps) {
+  const { t } = useTranslation(['calendars', 'sky']);
+  const say = useWarningWords(form, entry, all);
+  const warnings = entry.dates?.warnings ?? [];
+  if (warnings.length === 0) return null;
+  const row = leadingRow(form);
+  return (
+    <Care className="mt-3">
+      <h3 className="text-body">{t('warning.title')}</h3>
+      <ul className="grid gap-2">
+        {warnings.map((warning) => (
+          <li key={warning}>
+            <p>{say(warning)}</p>
+            <div className="flex flex-wrap gap-x-2">
+              {waysOut(warning, form.draft, row).map((way) => (
+                <Button
+                  key={way.kind === 'otherDay' ? way.phenomenon : way.kind}
+                  look="quiet"
+                  onClick={() => {
+                    onWay(way);
+                  }}
+                >
+                  {way.kind === 'otherDay'
+                    ? t('warning.way.otherDay', { phenomenon: t(`sky:phenomenon.${way.phenomenon}`) })
+                    : t(`warning.way.${way.kind}`)}
+                </Button>
+              ))}
+            </div>
+          </li>
+        ))}
+      </ul>
+      <p className="mt-1 text-small">{t('warning.stillSaves')}</p>
+    </Care>
+  );
+}
+
+function useWarningWords(
+  form: FormState,
+  entry: ShownEntry,
+  all: readonly ShownEntry[],
+): (warning: EntryWarning) => string {
+  const { t, i18n } = useTranslation(['calendars', 'sky']);
+  const dates = useDateWords();
+  const { draft, year } = form;
+  const row = leadingRow(form);
+  const lastDay = dates.day({ year, ...draft.lastDate.date });
+  return (warning) =>
+    t(`warning.${warning}`, {
+      year,
+      marker: row ? markerName(row) : draft.marker.markerKey,
+      phenomenon: t(`sky:phenomenon.${draft.marker.phenomenon}`),
+      day: lastDay,
+      others:
+        warning === 'windows-overlap'
+          ? listWords(
+              collidingWith(entry, all).map(({ content }) => content.titleOfficer || t('editor.untitled')),
+              i18n.language,
+            )
+          : '',
+    });
+}

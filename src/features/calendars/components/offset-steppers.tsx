@@ -1,0 +1,78 @@
+import { ChevronLeft, ChevronRight } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import { OFFSET_MAX_DAYS, type EntryOffsets } from '#shared/contracts/calendars.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { Button } from '#src/ui/button.js';
+import { Stepper } from '#src/ui/stepper.js';
+import { leadDayNumber, type FormState } from '../model/form-state.js';
+import { OFFSETS, shifted, signed } from '../model/offsets.js';
+
+const LABELS = {
+  earliestDays: 'days.earliest',
+  bestFromDays: 'days.bestFrom',
+  bestToDays: 'days.bestTo',
+  lastAdvisedDays: 'days.lastAdvised',
+} as const satisfies Record<keyof EntryOffsets, string>;
+
+/** Four days, each stepped away from the leading day, with the date it comes to. */
+export function OffsetSteppers({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const dates = useDateWords();
+  const { draft, change, at, content } = form;
+  const lead = leadDayNumber(form);
+  const isFixedLast = form.dates?.window?.lastAdvisedBy === 'fixed';
+  const dateOf = (name: keyof EntryOffsets) => {
+    if (name === 'lastAdvisedDays' && isFixedLast && form.dates?.window) {
+      return dates.day(form.dates.window.lastAdvised);
+    }
+    return lead === null ? '' : dates.day(lead + draft.offsets[name]);
+  };
+  return (
+    <div className="grid gap-3">
+      <div className="grid gap-3 @min-[26rem]:grid-cols-2 @min-[43rem]:grid-cols-4">
+        {OFFSETS.map((name) => (
+          <Stepper
+            key={name}
+            label={
+              <>
+                {t(LABELS[name])} <strong>{dateOf(name)}</strong>
+              </>
+            }
+            value={draft.offsets[name]}
+            min={-OFFSET_MAX_DAYS}
+            max={OFFSET_MAX_DAYS}
+            bigStep={7}
+            format={(days) => t('form.stepDays', { count: Math.abs(days), days: signed(days) })}
+            problem={at(`offsets.${name}`)}
+            hint={
+              name === 'lastAdvisedDays' && isFixedLast
+                ? t('form.fixedLast', { source: content.lastDate?.source ?? '' })
+                : undefined
+            }
+            onChange={(days) => {
+              change((now) => ({ offsets: { ...now.offsets, [name]: days } }));
+            }}
+          />
+        ))}
+      </div>
+      <div className="flex flex-wrap gap-2">
+        <Button
+          icon={<ChevronLeft aria-hidden className="turns" size={20} />}
+          onClick={() => {
+            change((now) => ({ offsets: shifted(now.offsets, -1) }));
+          }}
+        >
+          {t('form.wholeEarlier')}
+        </Button>
+        <Button
+          icon={<ChevronRight aria-hidden className="turns" size={20} />}
+          onClick={() => {
+            change((now) => ({ offsets: shifted(now.offsets, 1) }));
+          }}
+        >
+          {t('form.wholeLater')}
+        </Button>
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,63 @@
+import { useTranslation } from 'react-i18next';
+import type { EntryInput } from '#shared/contracts/calendars.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { SignIcon } from '#src/ui/icons/drawn-icon.js';
+import { signed } from '../model/offsets.js';
+import type { Unit } from '../model/stale-choice.js';
+
+/** Any year without a 29 February. */
+const PLAIN_YEAR = 2027;
+
+/** One part of an entry as words, for two texts side by side. */
+export function UnitValue({
+  unit,
+  content,
+  markers,
+}: {
+  unit: Unit;
+  content: EntryInput;
+  markers: NamesByKey;
+}) {
+  const { t } = useTranslation('calendars');
+  const dates = useDateWords();
+  const words = useEntryWords();
+  switch (unit) {
+    case 'kind':
+      return t(`kind.${content.kind}`);
+    case 'icon':
+      return (
+        <span className="inline-flex items-center gap-2">
+          <SignIcon sign={content.icon} size={28} />
+          {t(`icon.${content.icon}`)}
+        </span>
+      );
+    case 'lead':
+      return words.leadAlone(content, markers);
+    case 'offsets': {
+      const { earliestDays, bestFromDays, bestToDays, lastAdvisedDays } = content.offsets;
+      return t('stale.offsetsAre', {
+        earliest: signed(earliestDays),
+        bestFrom: signed(bestFromDays),
+        bestTo: signed(bestToDays),
+        lastAdvised: signed(lastAdvisedDays),
+      });
+    }
+    case 'lastDate':
+      if (!content.lastDate) return t(content.protectiveWatch ? 'stale.noLastDateWatch' : 'stale.noLastDate');
+      return t('stale.lastDateIs', {
+        day: dates.day({ year: PLAIN_YEAR, ...content.lastDate.date }),
+        source: content.lastDate.source,
+      });
+    case 'agreedToPrint':
+      return t(content.agreedToPrint ? 'stale.yes' : 'stale.no');
+    case 'sharingLevel':
+      return t(`level.${content.sharingLevel}`);
+    default:
+      return content[unit] === '' ? (
+        <span className="text-umber-soft">{t('stale.empty')}</span>
+      ) : (
+        <span className="whitespace-pre-line">{content[unit]}</span>
+      );
+  }
+}

@@ -1,0 +1,36 @@
+import { useMemo } from 'react';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import type { FieldProblems } from '../model/field-problems.js';
+import type { FormState } from '../model/form-state.js';
+import type { Editor } from '../model/use-editor.js';
+
+/** The form of the entry that is open; null while none is. */
+export function useFormState(editor: Editor, problems: FieldProblems): FormState | null {
+  const words = useProblemWords();
+  const { selected, draft, shown, markers, community, calendar, edits, newStart } = editor;
+  const inUse = useMemo(
+    () =>
+      new Set(
+        shown.flatMap(({ content }) => (content.lead.type === 'marker' ? [content.lead.markerKey] : [])),
+      ),
+    [shown],
+  );
+  if (selected === null || draft === null) return null;
+  return {
+    draft,
+    content: selected.content,
+    dates: selected.dates,
+    year: calendar.year,
+    change: (change) => {
+      edits.change(selected.id, selected.saved ?? newStart, change);
+    },
+    at: (field) => {
+      const problem = problems.get(field);
+      return problem && words.field(problem.code, problem.message);
+    },
+    markers: markers.data?.byKey ?? null,
+    inUse,
+    villageLanguage: community?.villageLanguage ?? null,
+    officerLanguage: community?.officerLanguage ?? null,
+  };
+}

@@ -1,0 +1,92 @@
+import { useTranslation } from 'react-i18next';
+import { ENTRY_ICONS, ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
+import { SelectField, TextAreaField, TextField } from '#src/ui/field.js';
+import { SignIcon } from '#src/ui/icons/drawn-icon.js';
+import { PickGroup } from '#src/ui/pick.js';
+import type { FormState } from '../model/form-state.js';
+
+/** What is done: its name in both languages, its kind and picture, crop, notes and caution. */
+export function WhatFields({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const { draft, change, at, officerLanguage, villageLanguage } = form;
+  return (
+    <div className="grid gap-4">
+      <TextField
+        label={t('form.titleOfficer', { language: officerLanguage?.name ?? '…' })}
+        lang={officerLanguage?.tag}
+        value={draft.titleOfficer}
+        problem={at('titleOfficer')}
+        onChange={(event) => {
+          change({ titleOfficer: event.currentTarget.value });
+        }}
+      />
+      <TextField
+        label={t('form.titleVillage', { language: villageLanguage?.name ?? '…' })}
+        lang={villageLanguage?.tag}
+        className="own-words"
+        value={draft.titleVillage}
+        problem={at('titleVillage')}
+        onChange={(event) => {
+          change({ titleVillage: event.currentTarget.value });
+        }}
+      />
+      <div className="grid gap-4 @min-[34rem]:grid-cols-2">
+        <SelectField
+          label={t('form.kind')}
+          value={draft.kind}
+          problem={at('kind')}
+          onChange={(event) => {
+            change({ kind: event.currentTarget.value as EntryKind });
+          }}
+        >
+          {ENTRY_KINDS.map((kind) => (
+            <option key={kind} value={kind}>
+              {t(`kind.${kind}`)}
+            </option>
+          ))}
+        </SelectField>
+        <TextField
+          label={t('form.crop')}
+          value={draft.crop}
+          problem={at('crop')}
+          onChange={(event) => {
+            change({ crop: event.currentTarget.value });
+          }}
+        />
+      </div>
+      <PickGroup
+        label={t('form.icon')}
+        value={draft.icon}
+        problem={at('icon')}
+        onChange={(icon) => {
+          change({ icon });
+        }}
+        options={ENTRY_ICONS.map((icon) => ({
+          value: icon,
+          label: t(`icon.${icon}`),
+          icon: <SignIcon sign={icon} size={30} />,
+        }))}
+      />
+      <TextAreaField
+        label={t('form.notes')}
+        hint={t('form.notesHint')}
+        rows={3}
+        value={draft.notes}
+        problem={at('notes')}
+        onChange={(event) => {
+          change({ notes: event.currentTarget.value });
+        }}
+      />
+      <TextAreaField
+        label={t('form.caution')}
+        hint={t('form.cautionHint')}
+        rows={2}
+        value={draft.caution}
+        problem={at('caution')}
+        onChange={(event) => {
+          change({ caution: event.currentTarget.value });
+        }}
+      />
+    </div>
+  );
+}

@@ -1,0 +1,89 @@
+import { useTranslation } from 'react-i18next';
+import { useDateWords } from '#src/lib/date-words.js';
+import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
+import { endOfNight } from '#src/lib/sky-words.js';
+import { TextField } from '#src/ui/field.js';
+import { PickGroup } from '#src/ui/pick.js';
+import type { FormState } from '../model/form-state.js';
+import { LastDateFields } from './last-date-fields.js';
+import { MarkerFields } from './marker-fields.js';
+import { MonthDayFields } from './month-day-fields.js';
+import { OffsetSteppers } from './offset-steppers.js';
+import { WindowPicture } from './window-picture.js';
+
+/** When it is done: what leads, four days from it, and what may cut them short. */
+export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () => void }) {
+  const { t } = useTranslation('calendars');
+  const days = useMarkerDayWords();
+  const { draft, change, dates } = form;
+  return (
+    <div className="grid gap-4">
+      <PickGroup
+        label={t('form.leadType')}
+        value={draft.leadType}
+        onChange={(leadType) => {
+          change({ leadType });
+        }}
+        options={[
+          { value: 'marker', label: t('form.byMarker'), note: t('form.byMarkerNote') },
+          { value: 'fixed-date', label: t('form.byDate'), note: t('form.byDateNote') },
+        ]}
+      />
+      {draft.leadType === 'marker' ? (
+        <MarkerFields form={form} onSearch={onSearch} />
+      ) : (
+        <FixedDateFields form={form} />
+      )}
+      <div className="grid gap-3">
+        <p>
+          {dates?.marker && <strong>{days.about(dates.marker)}. </strong>}
+          <CountedFrom form={form} />
+        </p>
+        <OffsetSteppers form={form} />
+        <WindowPicture form={form} />
+      </div>
+      <LastDateFields form={form} />
+    </div>
+  );
+}
+
+/** From which day the steps are counted. */
+function CountedFrom({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const dateWords = useDateWords();
+  const { draft, dates, year } = form;
+  if (draft.leadType === 'fixed-date') {
+    return t('form.daysFromDate', { day: dateWords.day({ year, ...draft.fixed.date }) });
+  }
+  if (!dates?.marker) return t('form.daysFromNothing');
+  return endOfNight(draft.marker.phenomenon) === 'dawn'
+    ? t('form.daysFromMorning')
+    : t('form.daysFromEvening');
+}
+
+function FixedDateFields({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const { draft, change, at } = form;
+  return (
+    <div className="grid gap-4 @min-[34rem]:grid-cols-2">
+      <MonthDayFields
+        label={t('form.fixedDate')}
+        value={draft.fixed.date}
+        problem={at('lead.date.day')}
+        onChange={(date) => {
+          change((now) => ({ fixed: { ...now.fixed, date } }));
+        }}
+      />
+      <TextField
+        label={t('form.source')}
+        hint={t('form.sourceHint')}
+        value={draft.fixed.source}
+        problem={at('lead.source')}
+        onChange={(event) => {
+          const source = event.currentTarget.value;
+          change((now) => ({ fixed: { ...now.fixed, source } }));
+        }}
+      />
+    </div>
+  );
+}

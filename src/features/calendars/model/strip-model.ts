@@ -1,0 +1,41 @@
+import type { MarkerRow } from '#shared/contracts/stars.js';
+import { windowDayNumbers } from '#src/lib/entry-words.js';
+import type { BoardBar, BoardPairing } from '#src/ui/pictures/year-board.js';
+import type { Markers, ShownEntry } from './preview-dates.js';
+
+/** The stars and figures that entries go by, each once, in the order in which the entries bring them. */
+export function lanesOf(entries: readonly ShownEntry[], markers: Markers | null): MarkerRow[] {
+  const rows = new Map<string, MarkerRow>();
+  for (const { content } of entries) {
+    if (content.lead.type !== 'marker') continue;
+    const row = markers?.get(content.lead.markerKey);
+    if (row) rows.set(row.markerKey, row);
+  }
+  return [...rows.values()];
+}
+
+export function barsOf(entries: readonly ShownEntry[], nameOf: (entry: ShownEntry) => string): BoardBar[] {
+  return entries.flatMap((entry) => {
+    const window = entry.dates?.window;
+    if (!window) return [];
+    return [
+      {
+        key: entry.id,
+        name: nameOf(entry),
+        days: windowDayNumbers(window),
+        kind: entry.content.protectiveWatch ? ('watch' as const) : ('work' as const),
+      },
+    ];
+  });
+}
+
+/** From the marker's expected day in its lane to the window; null for a fixed date or without one. */
+export function pairingOf(entry: ShownEntry | null): BoardPairing | null {
+  if (entry?.content.lead.type !== 'marker' || !entry.dates?.marker) return null;
+  return { laneKey: entry.content.lead.markerKey, dayNumber: entry.dates.marker.expected.dayNumber };
+}
+
+/** Entries without a bar. */
+export function undatedOf(entries: readonly ShownEntry[]): ShownEntry[] {
+  return entries.filter((entry) => !entry.dates?.window);
+}
