@@ -62,8 +62,21 @@ const NEEDS_NO_GLYPH = /^(?:\p{Cf}|\p{Variation_Selector})$/u;
 /** Spaces, figures and punctuation stay with the script around them where its typeface has them. */
 const NEUTRAL = /^[\p{White_Space}\p{P}\p{S}]+$/u;
 
+const REMEMBERED_TEXTS = 5_000;
+const remembered = new Map<string, readonly TextRun[]>();
+
 /** Cuts text into runs of one typeface each; a letter and its marks always stay together. Text is composed first. */
-export function textRuns(text: string, weight: FontWeight): TextRun[] {
+export function textRuns(text: string, weight: FontWeight): readonly TextRun[] {
+  const key = `${weight} ${text}`;
+  const known = remembered.get(key);
+  if (known) return known;
+  const runs = cutIntoRuns(text, weight);
+  if (remembered.size >= REMEMBERED_TEXTS) remembered.clear();
+  remembered.set(key, runs);
+  return runs;
+}
+
+function cutIntoRuns(text: string, weight: FontWeight): TextRun[] {
   const runs: { face: FaceName; text: string }[] = [];
   for (const { segment } of graphemes.segment(text.normalize('NFC'))) {
     const last = runs.at(-1);

@@ -1,23 +1,30 @@
 import type { TextMeasurer } from '#shared/sheet/text-layout.js';
 import { MM_PER_PT } from '#shared/sheet/units.js';
 import { fontOf, textRuns } from './font-book.js';
+import type { FaceName, FontWeight } from './font-book.js';
 
-/** Remembered widths: a sheet asks for the same words over and over. */
+/** Remembered words: a sheet asks for the same ones over and over. */
 const REMEMBERED = 20_000;
 const widthsEm = new Map<string, number>();
+
+/** A word with the space after it is shaped as one piece, here and when it is drawn. */
+function wordWidthEm(word: string, face: FaceName, weight: FontWeight): number {
+  const key = `${face} ${weight} ${word}`;
+  const known = widthsEm.get(key);
+  if (known !== undefined) return known;
+  const font = fontOf(face, weight);
+  const widthEm = font.layout(word).advanceWidth / font.unitsPerEm;
+  if (widthsEm.size >= REMEMBERED) widthsEm.clear();
+  widthsEm.set(key, widthEm);
+  return widthEm;
+}
 
 /** Measures with the typefaces that will draw the text, kerning and marks included. */
 export const fontMeasurer: TextMeasurer = {
   widthMm: (text, { sizePt, weight }) => {
-    const key = `${weight} ${text}`;
-    let em = widthsEm.get(key);
-    if (em === undefined) {
-      em = textRuns(text, weight).reduce((sum, run) => {
-        const font = fontOf(run.face, weight);
-        return sum + font.layout(run.text).advanceWidth / font.unitsPerEm;
-      }, 0);
-      if (widthsEm.size >= REMEMBERED) widthsEm.clear();
-      widthsEm.set(key, em);
+    let em = 0;
+    for (const run of textRuns(text, weight)) {
+      for (const word of run.text.split(/(?<=[ \t])/u)) em += wordWidthEm(word, run.face, weight);
     }
     return em * sizePt * MM_PER_PT;
   },

@@ -110,8 +110,6 @@ function drawText(doc: PDFKit.PDFDocument, text: TextPrimitive): void {
         doc.text(run.text, x, line.baseline, {
           lineBreak: false,
           baseline: 'alphabetic',
-          // Lay the run out as one piece, as it was measured; without this, word by word.
-          features: [],
           fill: !isOutline,
           stroke: isOutline,
         });

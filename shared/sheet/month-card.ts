@@ -24,7 +24,7 @@ export const CARD_HEIGHT_MM = 297;
 const LEFT_MM = 16.1;
 const RIGHT_MM = LEFT_MM + 7 * CARD_PITCH_MM;
 const BOTTOM_MM = CARD_HEIGHT_MM - 8;
-const BAR_DOWN_X_MM = 10.6;
+const BAR_DOWN_X_MM = 10.2;
 const BAR_DOWN_TOP_MM = 62;
 const RING_DY_MM = 4.9;
 const LANES_TOP_MM = 8.8;
@@ -116,7 +116,7 @@ function page(
     ...primitives,
     ...barDown(
       model,
-      { x: BAR_DOWN_X_MM, top: BAR_DOWN_TOP_MM, textBaseline: BAR_DOWN_X_MM + 3.8 },
+      { x: BAR_DOWN_X_MM, top: BAR_DOWN_TOP_MM, textBaseline: BAR_DOWN_X_MM + 4.3 },
       measurer,
     ),
   ];
