@@ -27,7 +27,7 @@ test('the year board shows its tiles on a phone as well', async ({ page }) => {
   await page.setViewportSize({ width: 320, height: 640 });
   await signIn(page, 'staff');
   await page.getByRole('link', { name: /can be printed/ }).click();
-  await page.getByText('Year board').click();
+  await page.getByRole('radio', { name: /Year board/ }).check();
   await expect(page.getByRole('img', { name: /Page 1/ })).toBeVisible();
   await expectNoSidewaysScroll(page);
 });
