@@ -1,7 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { useWidth } from './use-width.js';
 import { classNames } from './class-names.js';
-import { Button } from './button.js';
 
 /** A count as pegs in holes: signs in, answers in. */
 export function CountPegs({
@@ -87,31 +86,5 @@ export function Peg({ x, footY, size = 1 }: { x: string; footY: number; size?: n
       />
       <circle cx={x} cy={footY - stem - head + 6 * size} r={head} className="pic-peg" />
     </>
-  );
-}
-
-export interface LongWorkProps {
-  label: string;
-  done: number;
-  total: number;
-  onStop?: (() => void) | undefined;
-}
-
-/** Long work counts in holes and can be stopped. */
-export function LongWork({ label, done, total, onStop }: LongWorkProps) {
-  const { t } = useTranslation('common');
-  return (
-    <div className="long-work">
-      <div role="progressbar" aria-label={label} aria-valuemin={0} aria-valuemax={total} aria-valuenow={done}>
-        <ProgressPegs
-          total={total}
-          current={done < total ? done : null}
-          isDone={(index) => index < done}
-          label={label}
-        />
-      </div>
-      {onStop && <Button onClick={onStop}>{t('stop')}</Button>}
-      <p className="col-span-2 text-small">{label}</p>
-    </div>
   );
 }

@@ -59,31 +59,6 @@ export function PickGroup<T extends string>(props: PickGroupProps<T>) {
   );
 }
 
-/** On or off, drawn as a pick: filters that may stand together. */
-export function PickToggle({
-  pressed,
-  onChange,
-  children,
-}: {
-  pressed: boolean;
-  onChange: (pressed: boolean) => void;
-  children: ReactNode;
-}) {
-  return (
-    <button
-      type="button"
-      className="pick"
-      aria-pressed={pressed}
-      onClick={() => {
-        onChange(!pressed);
-      }}
-    >
-      <span className="ring" aria-hidden />
-      <span>{children}</span>
-    </button>
-  );
-}
-
 /** Tabs that are addresses: the peg stands in the current one. */
 export function TabLinks({
   label,

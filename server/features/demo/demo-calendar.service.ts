@@ -1,5 +1,6 @@
 import type { AnswerWord } from '#shared/contracts/reviews.js';
 import type { Role } from '#shared/contracts/people.js';
+import { addDays, subDays } from 'date-fns';
 import type { DataSource } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -18,7 +19,6 @@ import { DEMO_DOMAIN, UPPER_TAZIMEL } from './demo-villages.data.js';
 import { SECOND_ROUND, STANDING_DIFFERENCE, TAZIMEL_ENTRIES } from './tazimel-entries.data.js';
 
 const DEMO_YEAR = 2027;
-const DAY_MS = 24 * 60 * 60 * 1000;
 const SUBMISSIONS = 2;
 
 /**
@@ -80,7 +80,7 @@ class DemoRound {
     clock: Clock,
     private readonly cast: Cast,
   ) {
-    this.at = new Date(clock.now().getTime() - 24 * DAY_MS);
+    this.at = subDays(clock.now(), 24);
     const playClock = { now: () => this.at };
     const sky = new SkyDatesService();
     const versions = new VersionsService(dataSource);
@@ -169,6 +169,6 @@ class DemoRound {
   }
 
   private daysLater(days: number): void {
-    this.at = new Date(this.at.getTime() + days * DAY_MS);
+    this.at = addDays(this.at, days);
   }
 }

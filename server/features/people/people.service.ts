@@ -5,6 +5,7 @@ import type {
   PersonUpdate,
   Role,
 } from '#shared/contracts/people.js';
+import { addDays } from 'date-fns';
 import { randomUUID } from 'node:crypto';
 import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
@@ -16,7 +17,7 @@ import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { CODE_LIFETIME_MS, codeHash, newCode } from '../session/one-time-codes.service.js';
+import { CODE_LIFETIME_DAYS, codeHash, newCode } from '../session/one-time-codes.service.js';
 import { toCommunityPerson } from './people.mapper.js';
 
 export class PeopleService {
@@ -151,7 +152,7 @@ export class PeopleService {
       personId,
       codeHash: codeHash(code),
       failedTries: 0,
-      expiresAt: new Date(now.getTime() + CODE_LIFETIME_MS),
+      expiresAt: addDays(now, CODE_LIFETIME_DAYS),
       usedAt: null,
     });
     return code;

@@ -1,3 +1,4 @@
+import { addDays } from 'date-fns';
 import { randomBytes, randomUUID } from 'node:crypto';
 import { IsNull, type DataSource } from 'typeorm';
 import { OneTimeCodeEntity } from '../../db/entities/one-time-code.entity.js';
@@ -5,7 +6,7 @@ import { PersonEntity } from '../../db/entities/person.entity.js';
 import type { Clock } from '../../http/context.js';
 import { codeHash } from './one-time-codes.service.js';
 
-const LINK_LIFETIME_MS = 7 * 24 * 60 * 60 * 1000;
+const LINK_LIFETIME_DAYS = 7;
 
 /**
  * The secret of the one-time link with which the first steward founds the first community. Null once anybody
@@ -24,7 +25,7 @@ export async function firstStewardToken(dataSource: DataSource, clock: Clock): P
     personId: null,
     codeHash: codeHash(token),
     failedTries: 0,
-    expiresAt: new Date(now.getTime() + LINK_LIFETIME_MS),
+    expiresAt: addDays(now, LINK_LIFETIME_DAYS),
     usedAt: null,
   });
   return token;

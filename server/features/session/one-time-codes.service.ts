@@ -3,7 +3,7 @@ import { createHash, randomInt } from 'node:crypto';
 /** No 0/O, 1/I/L: the code is read aloud and copied by hand. 31 letters, 12 of them: 59 bits. */
 const ALPHABET = 'ABCDEFGHJKMNPQRSTUVWXYZ23456789';
 const LENGTH = 12;
-export const CODE_LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
+export const CODE_LIFETIME_DAYS = 14;
 export const CODE_TRIES = 10;
 
 /** A fresh code, in groups of four for reading. */

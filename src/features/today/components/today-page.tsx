@@ -9,7 +9,7 @@ import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
-import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { EmptyState, Skeleton, StaleLine, TroubleNote } from '#src/ui/waiting.js';
 import { todayQuery } from '../api/today-query.js';
 import { useWaitingWords } from '../model/waiting-words.js';
 import { ComingBoard } from './coming-board.js';
@@ -19,7 +19,7 @@ import { WatchCard } from './watch-card.js';
 
 /** Where everybody lands: what waits for them, the peg, and what to look for. */
 export function TodayPage() {
-  const { t } = useTranslation('today');
+  const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
   const { place, isLoading } = useCurrentPlace();
   const words = useProblemWords();
@@ -34,7 +34,12 @@ export function TodayPage() {
         under={data?.placeName ?? communityName}
       />
       {today.isPending && <Skeleton lines={8} />}
-      {today.error !== null && (
+      {today.error !== null && data && (
+        <StaleLine onRetry={() => void today.refetch()}>
+          {t('common:offline.stale', { when: dates.moment(new Date(today.dataUpdatedAt)) })}
+        </StaleLine>
+      )}
+      {today.error !== null && !data && (
         <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
       )}
       {data && <TodayBoards data={data} />}
