@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { Store, type SessionData } from 'express-session';
-import { LessThan, type DataSource, type EntityManager } from 'typeorm';
+import { LessThan, type DataSource } from 'typeorm';
 import { SessionEntity } from '../db/entities/session.entity.js';
 import type { Clock } from './context.js';
 
@@ -54,11 +54,6 @@ export class SessionStore extends Store {
   private get rows() {
     return this.dataSource.getRepository(SessionEntity);
   }
-}
-
-/** Ends every session of a person, on all devices. */
-export async function endSessionsOf(manager: EntityManager, personId: string): Promise<void> {
-  await manager.delete(SessionEntity, { personId });
 }
 
 /** What the browser holds opens a session; what the table holds does not. */

@@ -9,8 +9,8 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Person } from '../../http/actor.js';
 import { AppError, conflict, invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { endSessionsOf } from '../../http/session-store.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { endSessionsOf } from './end-sessions.service.js';
 import { CODE_TRIES, codeHash } from './one-time-codes.service.js';
 import { hashPassword, passwordMatches } from './passwords.service.js';
 
