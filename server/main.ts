@@ -8,8 +8,11 @@ import { ConfigError, readConfig, type Config } from './config/env.js';
 import { createDataSource } from './db/data-source.js';
 import { DatabaseUnfitError, migrate } from './db/migrate.js';
 import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
+import { removeExpiredSessions } from './features/session/end-sessions.service.js';
 import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
+
+const DAY_MS = 24 * 60 * 60 * 1000;
 
 /** A reason not to start that the person at the machine can mend: one sentence, no stack. */
 class StartRefused extends Error {}
@@ -33,6 +36,7 @@ async function main(): Promise<void> {
     });
     const server = await listen(express, config);
     log.info({ address: config.publicUrl }, 'listening');
+    tidySessionsDaily(dataSource, clock, log);
     closeOnSignal(server, dataSource, log);
   } catch (error) {
     await dataSource.destroy();
@@ -70,6 +74,17 @@ function listen(express: ReturnType<typeof createApp>['express'], config: Config
       }
     });
   });
+}
+
+function tidySessionsDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
+  const tidy = () => {
+    removeExpiredSessions(dataSource.manager, clock.now()).catch((error: unknown) => {
+      log.warn({ err: error }, 'old sessions stay for another day');
+    });
+  };
+  tidy();
+  // Never keeps the process alive by itself.
+  setInterval(tidy, DAY_MS).unref();
 }
 
 /** Answers what has begun, then lets go of the database; a second signal does not hurry it into a loss. */

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { Store, type SessionData } from 'express-session';
-import { LessThan, type DataSource } from 'typeorm';
+import type { DataSource } from 'typeorm';
 import { SessionEntity } from '../db/entities/session.entity.js';
 import type { Clock } from './context.js';
 
@@ -44,11 +44,6 @@ export class SessionStore extends Store {
 
   override touch(sid: string, session: SessionData, done: Done = ignore): void {
     this.set(sid, session, done);
-  }
-
-  /** Rows whose time is over; called at the start and once a day. */
-  async removeExpired(): Promise<void> {
-    await this.rows.delete({ expiresAt: LessThan(this.clock.now()) });
   }
 
   private get rows() {

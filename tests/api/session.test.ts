@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { SessionEntity } from '#server/db/entities/session.entity.js';
+import { removeExpiredSessions } from '#server/features/session/end-sessions.service.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import { openTestApi, type TestApi } from '#tests/support/api.js';
 
@@ -138,3 +139,13 @@ describe('PUT /api/session/password', () => {
 function cookieOf(answer: { headers: Record<string, unknown> }): string {
   return /dawnpeg\.session=([^;]+)/.exec(String(answer.headers['set-cookie']))?.[1] ?? '';
 }
+
+describe('old sessions', () => {
+  it('are taken away once their time is over, and no others', async () => {
+    const client = await api.signIn('officer');
+    await removeExpiredSessions(api.dataSource.manager, new Date('2026-12-15T05:59:59Z'));
+    await client.get('/api/communities').expect(200);
+    await removeExpiredSessions(api.dataSource.manager, new Date('2026-12-15T06:00:01Z'));
+    expect(await api.dataSource.getRepository(SessionEntity).count()).toBe(0);
+  });
+});
