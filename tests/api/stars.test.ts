@@ -1,10 +1,10 @@
-import { parse } from 'csv-parse/sync';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Place } from '#shared/contracts/places.js';
 import type { Problem } from '#shared/contracts/problem.js';
-import type { MarkerDetail, MarkerRow, SkylineEffect } from '#shared/contracts/stars.js';
+import type { MarkerDetail, MarkerRow } from '#shared/contracts/stars.js';
 import { computeMarkerYear, PHENOMENA, STARS, watchTimes, yearStrip } from '#shared/sky/index.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import { addPlaceLike, firstPlace } from '#tests/support/place-api.js';
 
 let api: TestApi;
 let observer: Client;
@@ -26,12 +26,6 @@ interface Table {
   lastDayNumber: number;
 }
 
-async function firstPlace(client: Client): Promise<Place> {
-  const answer = await client.get(`/api/communities/${client.communityId}/places`).expect(200);
-  const [first] = (answer.body as { items: Place[] }).items;
-  if (!first) throw new Error('no place');
-  return first;
-}
 async function table(year = 2027, path = stars): Promise<Table> {
   return (await observer.get(`${path}?year=${year}`).expect(200)).body as Table;
 }
@@ -39,11 +33,7 @@ async function star(markerKey: string, year = 2027, path = stars): Promise<Marke
   return (await observer.get(`${path}/${markerKey}?year=${year}`).expect(200)).body as MarkerDetail;
 }
 async function addPlace(changes: Partial<Place>): Promise<string> {
-  const { id: _id, communityId: _communityId, version: _version, ...input } = place;
-  const answer = await officer
-    .post(`/api/communities/${officer.communityId}/places`, { ...input, ...changes })
-    .expect(201);
-  return `/api/places/${(answer.body as Place).id}/stars`;
+  return `/api/places/${(await addPlaceLike(officer, place, changes)).id}/stars`;
 }
 const iso = ({ year, month, day }: { year: number; month: number; day: number }) =>
   [String(year).padStart(4, '0'), ...[month, day].map((part) => String(part).padStart(2, '0'))].join('-');
@@ -250,156 +240,6 @@ describe('one star', () => {
         toDayNumber: polaris.lastDayNumber,
       },
     ]);
-  });
-});
-
-describe('the star table as CSV', () => {
-  const download = async (path = stars, year = 2027) =>
-    observer.get(`${path}.csv?year=${year}`).buffer(true).expect(200);
-  const read = (text: string) => parse<Record<string, string>>(text, { bom: true, columns: true });
-
-  it('is UTF-8 with a mark, RFC 4180, one line a marker under one line of titles', async () => {
-    const { text, headers } = await download();
-    expect(headers['content-type']).toBe('text/csv; charset=utf-8');
-    expect(text.startsWith('\ufeffkind,name,designation,HR number,magnitude V,')).toBe(true);
-    expect(text.split('\r\n').length).toBe(STARS.length + 2 + 1 + 1);
-    const lines = read(text);
-    expect(lines.length).toBe(STARS.length + 2);
-    expect(new Set(lines.map((line) => Object.keys(line).length)).size).toBe(1);
-  });
-
-  it('has the dates and ranges of the table, and numbers with their sign', async () => {
-    const { items } = await table();
-    const lines = read((await download()).text);
-    const sirius = lines.find((line) => line['name'] === 'Sirius');
-    const [rising] =
-      items.find((row) => row.markerKey === 'hr2491')?.phenomena['heliacal-rising'].occurrences ?? [];
-    expect(sirius).toMatchObject({
-      'magnitude V': '-1.46',
-      designation: 'α CMa',
-      'first morning seen: expected': rising?.expected.gregorian,
-      'first morning seen: earliest': rising?.early?.gregorian,
-      'first morning seen: latest': rising?.late?.gregorian,
-      'first morning seen: Julian Day Number': String(rising?.expected.dayNumber),
-      'calendar of the dates': 'Gregorian',
-    });
-  });
-
-  it('says why there is no date', async () => {
-    const lines = read((await download(await addPlace({ name: 'Ice', latitudeDeg: 66, skyline: [] }))).text);
-    expect(lines.find((line) => line['name'] === 'Polaris')).toMatchObject({
-      'what it does here': 'never sets',
-      'first morning seen: expected': '',
-      'first morning seen: remark': 'never sets',
-    });
-  });
-
-  it('carries basis and caution on every line, so that a line copied out alone keeps them', async () => {
-    const lines = read((await download()).text);
-    expect(lines.every((line) => line['basis']?.includes('Vogt 1920'))).toBe(true);
-    expect(lines.every((line) => line['caution']?.includes('do not forecast the weather'))).toBe(true);
-  });
-
-  it('runs nothing in a spreadsheet: a name that begins like a formula and a year BC get an apostrophe', async () => {
-    const path = await addPlace({ name: '=cmd|1' });
-    const { text } = await download(path, -43);
-    expect(read(text)[0]).toMatchObject({ place: "'=cmd|1", year: '-43', 'calendar of the dates': 'Julian' });
-    const dates = read(text).flatMap((line) => line['first morning seen: expected'] || []);
-    expect(dates.length).toBeGreaterThan(500);
-    expect(dates.every((date) => /^'-0043-\d\d-\d\d$/.test(date))).toBe(true);
-  });
-
-  it('is named after place and year, also where the name holds a slash or letters of another script', async () => {
-    const plain = await download();
-    expect(plain.headers['content-disposition']).toBe(
-      'attachment; filename="Upper_terraces_2027_stars.csv"; filename*=UTF-8\'\'Upper%20terraces%202027%20stars.csv',
-    );
-    const other = await download(await addPlace({ name: 'Ŋɔ́rɛ̃/2' }));
-    const name = /filename\*=UTF-8''(.*)$/.exec(other.headers['content-disposition'] ?? '')?.[1] ?? '';
-    expect(decodeURIComponent(name)).toBe('Ŋɔ́rɛ̃-2 2027 stars.csv'.normalize('NFC'));
-  });
-});
-
-describe('what the skyline does', () => {
-  const hills = [0, 90, 180, 270].map((azimuthDeg) => ({ azimuthDeg, altitudeDeg: 8 }));
-  const effectsOf = (answer: { body: unknown }) => (answer.body as { items: SkylineEffect[] }).items;
-
-  it('sets flat and hill dates with their ranges side by side for figures and the brightest stars', async () => {
-    const effects = effectsOf(
-      await observer.get(`/api/places/${place.id}/skyline-effects?year=2027`).expect(200),
-    );
-    expect(effects.slice(0, 2).map(({ name, phenomenon }) => [name, phenomenon])).toEqual([
-      ['Pleiades', 'heliacal-rising'],
-      ['Pleiades', 'heliacal-setting'],
-    ]);
-    const [cluster] = effects;
-    const hill = computeMarkerYear('pleiades', place, place, 2027);
-    const flat = computeMarkerYear('pleiades', { ...place, skyline: [] }, place, 2027);
-    const [overHill] = hill.phenomena['heliacal-rising'].occurrences;
-    const [overFlat] = flat.phenomena['heliacal-rising'].occurrences;
-    expect(cluster).toMatchObject({
-      hill: {
-        dayNumber: overHill?.expected.dayNumber,
-        early: { dayNumber: overHill?.early?.dayNumber },
-        late: { dayNumber: overHill?.late?.dayNumber },
-      },
-      flat: { dayNumber: overFlat?.expected.dayNumber },
-      differenceDays: (overHill?.expected.dayNumber ?? NaN) - (overFlat?.expected.dayNumber ?? NaN),
-    });
-  });
-
-  it('can be seen before a place is saved, and keeps nothing', async () => {
-    const { id: _id, communityId: _communityId, version: _version, ...input } = place;
-    const path = `/api/communities/${officer.communityId}`;
-    const countPlaces = async () => effectsOf(await officer.get(`${path}/places`)).length;
-    const before = await countPlaces();
-    const body = { place: { ...input, skyline: hills }, year: 2027 };
-    const effects = effectsOf(await officer.post(`${path}/skyline-effects`, body).expect(200));
-    const canopus = effects.find((one) => one.name === 'Canopus' && one.phenomenon === 'heliacal-rising');
-    const expected = computeMarkerYear('hr2326', { ...place, skyline: hills }, place, 2027);
-    expect(canopus?.hill?.dayNumber).toBe(
-      expected.phenomena['heliacal-rising'].occurrences[0]?.expected.dayNumber,
-    );
-    expect(canopus?.differenceDays).not.toBe(0);
-    expect(await countPlaces()).toBe(before);
-  });
-
-  it('says what takes a date away', async () => {
-    const { id: _id, communityId: _communityId, version: _version, ...input } = place;
-    const wall = hills.map((point) => ({ ...point, altitudeDeg: 50 }));
-    const body = { place: { ...input, skyline: wall }, year: 2027 };
-    const effects = effectsOf(
-      await officer.post(`/api/communities/${officer.communityId}/skyline-effects`, body).expect(200),
-    );
-    // Canopus culminates 25° high at 12° N.
-    expect(effects.find((one) => one.name === 'Canopus')).toMatchObject({
-      hill: null,
-      flat: { gregorian: expect.stringMatching(/^2027-/) as string },
-      differenceDays: null,
-      hillOutcome: 'never-clears-skyline',
-    });
-  });
-
-  it('shows no difference where the ground is flat', async () => {
-    const path = await addPlace({ name: 'Salt pan', skyline: [] });
-    const effects = effectsOf(
-      await observer.get(`${path.replace('/stars', '')}/skyline-effects?year=2027`).expect(200),
-    );
-    expect(effects.length).toBeGreaterThan(30);
-    expect(new Set(effects.map((one) => one.differenceDays))).toEqual(new Set([0]));
-  });
-
-  it('is shown before saving to officers only, and refuses a bad place like the form does', async () => {
-    await observer.post(`/api/communities/${observer.communityId}/skyline-effects`, {}).expect(403);
-    const answer = await officer.post(`/api/communities/${officer.communityId}/skyline-effects`, {
-      place: { ...place, latitudeDeg: 95 },
-      year: 2027,
-    });
-    expect(answer.status).toBe(422);
-    expect((answer.body as Problem).errors?.[0]).toMatchObject({
-      field: 'place.latitudeDeg',
-      code: 'latitude-range',
-    });
   });
 });
 
