@@ -35,6 +35,7 @@ export const WAITING_KINDS = [
   'sign-as-elder',
   'sign-as-steward',
   'elder-asked-change',
+  'elder-said-not-for-board',
   'review-progress',
   'ready-to-publish',
   'go-on-with-draft',

@@ -298,8 +298,23 @@ describe('what waits', () => {
       .post(`${versionPath(version)}/entries/${sow?.entryId ?? ''}/answer/stand`)
       .expect(200);
     expect((await waiting(village.officer)).map(({ kind }) => kind)).toEqual(['review-progress']);
+    await village.elder
+      .put(
+        `${versionPath(version)}/entries/${sow?.entryId ?? ''}/answer`,
+        says({ answer: 'not-for-the-board' }),
+      )
+      .expect(200);
+    expect((await waiting(village.officer))[0]).toMatchObject({
+      kind: 'elder-said-not-for-board',
+      entryTitle: 'Sow',
+      personName: 'Elder A-1',
+    });
     await answerAll(village.elder3, version);
-    expect(await waiting(village.officer)).toMatchObject([{ kind: 'review-progress', done: 1, of: 3 }]);
+    expect((await waiting(village.officer)).at(-1)).toMatchObject({
+      kind: 'review-progress',
+      done: 1,
+      of: 3,
+    });
     await signOff(village, version);
     expect(await waiting(village.officer)).toMatchObject([{ kind: 'ready-to-publish', number: 1 }]);
   });

@@ -1,4 +1,5 @@
 import type { Calendar } from '#shared/contracts/calendars.js';
+import type { AnswerWord } from '#shared/contracts/reviews.js';
 import type { WaitingItem } from '#shared/contracts/today.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { hasRole, seesDrafts, type Actor } from '../../http/actor.js';
@@ -7,6 +8,7 @@ import type { VersionsService } from '../versions/versions.service.js';
 
 /** What holds others up comes first. */
 const ORDER: readonly WaitingItem['kind'][] = [
+  'elder-said-not-for-board',
   'elder-asked-change',
   'ready-to-publish',
   'sign-as-steward',
@@ -84,19 +86,20 @@ function ofOfficer(
 ): WaitingItem[] {
   if (state === 'signed-off') return [item('ready-to-publish', calendar, { number })];
   const titles = new Map(entries.map(({ entryId, content }) => [entryId, content.titleOfficer]));
-  const asked = given
-    .filter(({ answer, letStand }) => answer === 'change-this' && !letStand)
-    .map(({ entryId, elderName, note }) =>
-      item('elder-asked-change', calendar, {
-        number,
-        entryId,
-        entryTitle: titles.get(entryId) ?? null,
-        personName: elderName,
-        note,
-      }),
-    );
+  const asked = given.flatMap(({ entryId, elderName, note, answer, letStand }) => {
+    const kind = standingKind(answer, letStand);
+    if (kind === null) return [];
+    const entryTitle = titles.get(entryId) ?? null;
+    return [item(kind, calendar, { number, entryId, entryTitle, personName: elderName, note })];
+  });
   const done = progress.filter(({ answered, of }) => answered === of).length;
   return [...asked, item('review-progress', calendar, { number, done, of: progress.length })];
+}
+
+/** What an elder said that stands in the way until the officer does something about it. */
+function standingKind(answer: AnswerWord, letStand: boolean): WaitingItem['kind'] | null {
+  if (answer === 'not-for-the-board') return 'elder-said-not-for-board';
+  return answer === 'change-this' && !letStand ? 'elder-asked-change' : null;
 }
 
 function item(

@@ -71,6 +71,10 @@ export const texts = {
       title: '{{person}} asks for a change: {{entry}}',
       detail: '“{{note}}”',
     },
+    'elder-said-not-for-board': {
+      title: '{{person}} says: not for the board: {{entry}}',
+      detail: 'Take the entry out of the draft, then submit again.',
+    },
     'review-progress': {
       title: '{{place}} {{year}}, submission {{number}}: {{done}} of {{of}} elders have answered',
       detail: 'Silence is never agreement; a visit may help.',

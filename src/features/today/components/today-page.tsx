@@ -106,6 +106,7 @@ function MainAction({ item }: { item: WaitingItem | undefined }) {
         return t('action.review');
       case 'go-on-with-draft':
       case 'elder-asked-change':
+      case 'elder-said-not-for-board':
         return t('action.draft', { year: String(item.year) });
       case 'print-published':
         return t('action.sheet');

@@ -13,6 +13,7 @@ const ICONS: Record<WaitingItem['kind'], ReactNode> = {
   'sign-as-elder': <StateIcon state="in-review" size={24} />,
   'sign-as-steward': <StateIcon state="in-review" size={24} />,
   'elder-asked-change': <StateIcon state="changes-asked" size={24} />,
+  'elder-said-not-for-board': <StateIcon state="changes-asked" size={24} />,
   'review-progress': <StateIcon state="in-review" size={24} />,
   'ready-to-publish': <StateIcon state="signed-off" size={24} />,
   'go-on-with-draft': <StateIcon state="draft" size={24} />,

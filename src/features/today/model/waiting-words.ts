@@ -54,6 +54,7 @@ function addressOf({ kind, calendarId, number, entryId }: WaitingItem): string {
     case 'sign-as-elder':
       return paths.review(calendarId, at);
     case 'elder-asked-change':
+    case 'elder-said-not-for-board':
       return entryId === null
         ? paths.version(calendarId, at)
         : paths.calendar(calendarId, { entry: entryId });
