@@ -60,7 +60,7 @@ export default {
     onlyFrom(
       'sky-stands-alone',
       '^shared/sky/',
-      ['^shared/sky/', '^node_modules/astronomy-engine/'],
+      ['^shared/sky/', '(^|/)node_modules/astronomy-engine/'],
       'The numeric core imports astronomy-engine and itself.',
     ),
     ...bottomToTop(skyLayers, 'shared/sky', 'sky-upward'),
@@ -88,7 +88,7 @@ export default {
     onlyFrom(
       'contracts-know-constants-only',
       '^shared/contracts/',
-      ['^shared/contracts/', '^shared/kernel/', '^shared/sky/vocabulary\\.ts$', '^node_modules/zod/'],
+      ['^shared/contracts/', '^shared/kernel/', '^shared/sky/vocabulary\\.ts$', '(^|/)node_modules/zod/'],
       'Contracts import zod, the kernel and the core’s constants.',
     ),
     onlyFrom(
@@ -142,7 +142,7 @@ export default {
       comment: 'A route takes a request apart, calls its service and answers.',
       severity: 'error',
       from: { path: '\\.routes\\.ts$' },
-      to: { path: ['^node_modules/typeorm/', '^server/db/'] },
+      to: { path: ['(^|/)node_modules/typeorm/', '^server/db/'] },
     },
     {
       name: 'services-without-express',
@@ -150,14 +150,14 @@ export default {
       severity: 'error',
       from: { path: '^server/features/.*\\.(service|mapper|repository)\\.ts$' },
       to: {
-        path: ['^node_modules/express', '^server/http/'],
+        path: ['(^|/)node_modules/express', '^server/http/'],
         pathNot: '^server/http/(app-error|actor|context)\\.ts$',
       },
     },
     onlyFrom(
       'workers-know-shared-only',
       '^server/workers/',
-      ['^server/workers/', '^shared/', '^node:', '^worker_threads$', '^node_modules/'],
+      ['^server/workers/', '^shared/', '^node:', '^worker_threads$', '(^|/)node_modules/'],
       'Work off the main thread takes plain values and the shared rules.',
     ),
     {

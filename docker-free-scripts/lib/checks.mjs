@@ -28,7 +28,10 @@ const checks = [
         'docker-free-scripts',
       ]),
   },
-  { name: 'unused code', run: () => tool('knip', ['--no-progress', '--no-config-hints']) },
+  {
+    name: 'unused code',
+    run: () => tool('knip', ['--no-progress', '--no-config-hints', '--tsConfig', 'tsconfig.lint.json']),
+  },
 ];
 
 async function allTypes() {
