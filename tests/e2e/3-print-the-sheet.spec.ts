@@ -7,7 +7,8 @@ test('staff look at every page and take the PDF of the published version', async
   await page.getByRole('link', { name: /can be printed/ }).click();
   await expect(page.getByRole('heading', { name: 'The sheet' })).toBeVisible();
   const pages = page.getByRole('list', { name: 'All pages' });
-  await expect(pages.getByRole('button', { name: 'June', exact: true })).toBeVisible();
+  // The server lays a whole year out and draws it once before the first page shows.
+  await expect(pages.getByRole('button', { name: 'June', exact: true })).toBeVisible({ timeout: 30_000 });
   await pages.getByRole('button', { name: 'June', exact: true }).click();
   await expect(page.getByRole('img', { name: /June/ })).toBeVisible();
   await expectAccessible(page);
@@ -28,6 +29,6 @@ test('the year board shows its tiles on a phone as well', async ({ page }) => {
   await signIn(page, 'staff');
   await page.getByRole('link', { name: /can be printed/ }).click();
   await page.getByRole('radio', { name: /Year board/ }).check();
-  await expect(page.getByRole('img', { name: /Page 1/ })).toBeVisible();
+  await expect(page.getByRole('img', { name: /Page 1/ })).toBeVisible({ timeout: 30_000 });
   await expectNoSidewaysScroll(page);
 });

@@ -22,19 +22,25 @@ interface DayHandlesProps {
   onMove: (part: MovePart, days: number) => void;
 }
 
-const RING = 16;
+/** Drawn at 16 px within a target of 24, the least that a finger or a shaking hand should get. */
+const TARGET = 24;
 
-/** Rings at both ends of the chosen window and a grip over it: drag them, or press the arrow keys. */
+/**
+ * Rings at both ends of the chosen window and a grip over it: drag them, or press the arrow keys. The rings stand
+ * outside the grip, so that the three targets of a window of a few days do not cover each other.
+ */
 export function DayHandles({ span, days, pxPerDay, top, height, words, onMove }: DayHandlesProps) {
-  const middle = top + height / 2;
-  const ring = (dayEdge: number) => ({
-    left: `calc(${percent(startPercent(dayEdge, span))} - ${String(RING / 2)}px)`,
-    top: middle - RING / 2,
-    width: RING,
-    height: RING,
-  });
   const from = Math.max(days.earliest, span.first);
   const to = Math.min(days.lastAdvised, span.last) + 1;
+  const middle = percent(startPercent((from + to) / 2, span));
+  const halfWidth = percent((startPercent(to, span) - startPercent(from, span)) / 2);
+  const half = `max(${String(TARGET / 2)}px, ${halfWidth})`;
+  const ring = (left: string) => ({
+    left,
+    top: top + height / 2 - TARGET / 2,
+    width: TARGET,
+    height: TARGET,
+  });
   const each = { pxPerDay, span, onMove };
   return (
     <>
@@ -46,8 +52,8 @@ export function DayHandles({ span, days, pxPerDay, top, height, words, onMove }:
         value={words.value.all}
         className="day-grip"
         style={{
-          left: percent(startPercent(from, span)),
-          width: percent(startPercent(to, span) - startPercent(from, span)),
+          left: `calc(${middle} - ${half})`,
+          width: `calc(2 * ${half})`,
           top: top - 6,
           height: height + 12,
         }}
@@ -60,7 +66,7 @@ export function DayHandles({ span, days, pxPerDay, top, height, words, onMove }:
           label={words.label.start}
           value={words.value.start}
           className="day-ring"
-          style={ring(days.earliest)}
+          style={ring(`calc(${middle} - ${half} - ${String(TARGET)}px)`)}
         />
       )}
       {days.lastAdvised <= span.last && (
@@ -71,7 +77,7 @@ export function DayHandles({ span, days, pxPerDay, top, height, words, onMove }:
           label={words.label.end}
           value={words.value.end}
           className="day-ring"
-          style={ring(days.lastAdvised + 1)}
+          style={ring(`calc(${middle} + ${half})`)}
         />
       )}
     </>

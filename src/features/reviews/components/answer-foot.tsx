@@ -98,7 +98,7 @@ export function AnswerFoot(props: AnswerFootProps) {
     );
   }
   return (
-    <div className="answer-foot">
+    <>
       {answer !== null && (
         <div className="answer-said">
           <span>
@@ -154,12 +154,14 @@ export function AnswerFoot(props: AnswerFootProps) {
           {answer.letStand && <span>{t('standing')}</span>}
         </div>
       )}
-      <AnswerButtons
-        label={spokesman?.name ? t('answersFor', { name: spokesman.name }) : t('answers')}
-        value={answer?.answer ?? null}
-        busy={put.isPending}
-        onAnswer={choose}
-      />
-    </div>
+      <div className="answer-foot">
+        <AnswerButtons
+          label={spokesman?.name ? t('answersFor', { name: spokesman.name }) : t('answers')}
+          value={answer?.answer ?? null}
+          busy={put.isPending}
+          onAnswer={choose}
+        />
+      </div>
+    </>
   );
 }
