@@ -17,11 +17,25 @@ const i18n = createInstance({
 });
 void i18n.init();
 
+const translators = new Map<string, Translate>();
+
 /** Texts of a namespace in a language, by its tag; what the language lacks is English. */
 export function translatorFor(language: string, namespace: Namespace): Translate {
-  const fixed = i18n.getFixedT(language, namespace) as (
-    key: string,
-    values?: Readonly<Record<string, string | number>>,
-  ) => string;
-  return (key, values) => fixed(key, values);
+  const name = `${language} ${namespace}`;
+  const known = translators.get(name);
+  if (known) return known;
+  const translate = remembering(i18n.getFixedT(language, namespace) as Translate);
+  translators.set(name, translate);
+  return translate;
+}
+
+/** A table asks for the same few words a thousand times over. */
+function remembering(translate: Translate): Translate {
+  const words = new Map<string, string>();
+  return (key, values) => {
+    if (values !== undefined) return translate(key, values);
+    const word = words.get(key) ?? translate(key);
+    words.set(key, word);
+    return word;
+  };
 }
