@@ -43,6 +43,21 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['calendars', 'versions', 'sky'],
     load: () => import('./routes/calendar.js'),
   },
+  {
+    path: PATTERNS.versions,
+    texts: ['versions'],
+    load: () => import('./routes/versions.js'),
+  },
+  {
+    path: PATTERNS.version,
+    texts: ['versions', 'calendars', 'reviews', 'places', 'sky'],
+    load: () => import('./routes/version.js'),
+  },
+  {
+    path: PATTERNS.compare,
+    texts: ['versions', 'calendars', 'sky'],
+    load: () => import('./routes/compare.js'),
+  },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,

@@ -2,6 +2,7 @@ import { queryOptions } from '@tanstack/react-query';
 import { calendarsEndpoints } from '#shared/contracts/calendars.js';
 import { peopleEndpoints } from '#shared/contracts/people.js';
 import { reviewsEndpoints } from '#shared/contracts/reviews.js';
+import { starsEndpoints } from '#shared/contracts/stars.js';
 import { versionsEndpoints } from '#shared/contracts/versions.js';
 import { callApi } from './api-client.js';
 
@@ -58,5 +59,24 @@ export function communityQuery(communityId: string) {
   return queryOptions({
     queryKey: ['community', communityId],
     queryFn: ({ signal }) => callApi(peopleEndpoints.readCommunity, { params: { communityId }, signal }),
+  });
+}
+
+/** Every star and figure at the calendar's place in its year: what an entry can go by. */
+export function markersQuery(placeId: string, year: number) {
+  return queryOptions({
+    queryKey: ['markers', placeId, year],
+    queryFn: async ({ signal }) => {
+      const { items, firstDayNumber, lastDayNumber } = await callApi(starsEndpoints.list, {
+        params: { placeId },
+        query: { year },
+        signal,
+      });
+      return {
+        span: { first: firstDayNumber, last: lastDayNumber },
+        rows: items,
+        byKey: new Map(items.map((row) => [row.markerKey, row])),
+      };
+    },
   });
 }

@@ -1,5 +1,13 @@
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
+import { TakeBack } from '#src/features/versions/components/take-back.js';
 
+/** The draft; where a submission locks it, the versions know the way out. */
 export function Component() {
-  return <EditorPage lockedAction={() => null} />;
+  return (
+    <EditorPage
+      lockedAction={({ id, outNumber }, isOfficer) =>
+        isOfficer && outNumber !== null ? <TakeBack calendarId={id} number={outNumber} /> : null
+      }
+    />
+  );
 }

@@ -1,6 +1,5 @@
 import { queryOptions } from '@tanstack/react-query';
 import { calendarsEndpoints } from '#shared/contracts/calendars.js';
-import { starsEndpoints } from '#shared/contracts/stars.js';
 import { callApi } from '#src/lib/api-client.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
 
@@ -19,24 +18,5 @@ export function entriesQuery(calendarId: string) {
     queryKey: calendarKeys.entries(calendarId),
     queryFn: async ({ signal }) =>
       (await callApi(calendarsEndpoints.listEntries, { params: { calendarId }, signal })).items,
-  });
-}
-
-/** Every star and figure at the calendar's place in its year: what an entry can go by. */
-export function markersQuery(placeId: string, year: number) {
-  return queryOptions({
-    queryKey: ['markers', placeId, year],
-    queryFn: async ({ signal }) => {
-      const { items, firstDayNumber, lastDayNumber } = await callApi(starsEndpoints.list, {
-        params: { placeId },
-        query: { year },
-        signal,
-      });
-      return {
-        span: { first: firstDayNumber, last: lastDayNumber },
-        rows: items,
-        byKey: new Map(items.map((row) => [row.markerKey, row])),
-      };
-    },
   });
 }

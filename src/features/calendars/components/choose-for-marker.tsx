@@ -1,11 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import type { Calendar } from '#shared/contracts/calendars.js';
+import { markersQuery } from '#src/lib/calendar-queries.js';
 import { useCurrentPlace } from '#src/lib/community.js';
 import { markerName } from '#src/lib/marker-names.js';
 import { Board } from '#src/ui/surfaces.js';
 import { PhenomenonIcon } from '#src/ui/icons/phenomenon-icon.js';
-import { markersQuery } from '../api/calendars-queries.js';
 import type { WantedMarker } from '../model/wanted-marker.js';
 
 /** Says what the new entry will go by while the person chooses its calendar. */

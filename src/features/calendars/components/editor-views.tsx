@@ -109,7 +109,12 @@ function Notes({ editor, lockedAction }: ViewParts) {
   return (
     <>
       {editor.calendar.locked && (
-        <LockedNote calendar={editor.calendar} unsavedCount={editor.edits.all.size} action={lockedAction} />
+        <LockedNote
+          calendar={editor.calendar}
+          state={editor.lastState}
+          unsavedCount={editor.edits.all.size}
+          action={lockedAction}
+        />
       )}
       <OrphanNotes editor={editor} />
     </>

@@ -2,10 +2,11 @@ import { ChevronLeft, ChevronRight } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { OFFSET_MAX_DAYS, type EntryOffsets } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { signed } from '#src/lib/signed.js';
 import { Button } from '#src/ui/button.js';
 import { Stepper } from '#src/ui/stepper.js';
 import { leadDayNumber, type FormState } from '../model/form-state.js';
-import { OFFSETS, shifted, signed } from '../model/offsets.js';
+import { OFFSETS, shifted } from '../model/offsets.js';
 
 const LABELS = {
   earliestDays: 'days.earliest',

@@ -2,8 +2,8 @@ import { useTranslation } from 'react-i18next';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { signed } from '#src/lib/signed.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
-import { signed } from '../model/offsets.js';
 import type { Unit } from '../model/stale-choice.js';
 
 /** Any year without a 29 February. */

@@ -38,8 +38,3 @@ export function endMoved(offsets: EntryOffsets, days: number): EntryOffsets {
   );
   return { ...offsets, lastAdvisedDays };
 }
-
-/** A count of days with a real minus sign. */
-export function signed(days: number): string {
-  return days < 0 ? `−${String(-days)}` : String(days);
-}

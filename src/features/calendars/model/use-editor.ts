@@ -2,8 +2,14 @@ import { useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import type { Calendar, Entry } from '#shared/contracts/calendars.js';
 import type { VersionSummary } from '#shared/contracts/versions.js';
-import { answersQuery, communityQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
-import { entriesQuery, markersQuery } from '../api/calendars-queries.js';
+import {
+  answersQuery,
+  communityQuery,
+  markersQuery,
+  versionQuery,
+  versionsQuery,
+} from '#src/lib/calendar-queries.js';
+import { entriesQuery } from '../api/calendars-queries.js';
 import { answersByEntry, type EntryAnswers } from './elder-requests.js';
 import { newDraft } from './entry-draft.js';
 import { draftFor, isStale, orphans, shownEntries } from './shown-entries.js';

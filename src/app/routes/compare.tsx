@@ -1,0 +1,1 @@
+export { ComparePage as Component } from '#src/features/versions/components/compare-page.js';

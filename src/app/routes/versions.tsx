@@ -1,0 +1,1 @@
+export { VersionsPage as Component } from '#src/features/versions/components/versions-page.js';

@@ -1,0 +1,113 @@
+import { useQuery, useSuspenseQueries } from '@tanstack/react-query';
+import { Printer } from 'lucide-react';
+import { useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import { useParams, useSearchParams } from 'react-router-dom';
+import { calendarQuery, versionsQuery } from '#src/lib/calendar-queries.js';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
+import { useRolesIn } from '#src/lib/roles-in.js';
+import { Button } from '#src/ui/button.js';
+import { Mast, Page } from '#src/ui/page.js';
+import { Board } from '#src/ui/surfaces.js';
+import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { comparisonQuery } from '../api/comparison-query.js';
+import { sideChoices, sidesOf, type Sides } from '../model/compare-sides.js';
+import { CompareResult, type Show } from './compare-result.js';
+import { CompareSides } from './compare-sides.js';
+
+/** What changed between two versions of a calendar, in sentences. */
+export function ComparePage() {
+  const { t } = useTranslation('versions');
+  const { calendarId = '' } = useParams();
+  const [search, setSearch] = useSearchParams();
+  const [{ data: calendar }, { data: versions }] = useSuspenseQueries({
+    queries: [calendarQuery(calendarId), versionsQuery(calendarId)],
+  });
+  const { seesDrafts } = useRolesIn(calendar.communityId);
+  usePageTitle(t('compare.title'));
+  const asked = { from: search.get('from'), to: search.get('to') };
+  const sides = sidesOf(asked, versions, seesDrafts);
+  return (
+    <Page>
+      <Mast
+        title={t('compare.title')}
+        under={t('compare.under', { year: calendar.year, place: calendar.placeName })}
+        backTo={paths.versions(calendarId)}
+      >
+        {sides !== null && (
+          <Button
+            icon={<Printer aria-hidden size={20} />}
+            onClick={() => {
+              window.print();
+            }}
+          >
+            {t('compare.print')}
+          </Button>
+        )}
+      </Mast>
+      {sides === null ? (
+        <Board>
+          <EmptyState title={t('compare.fewer')} />
+        </Board>
+      ) : (
+        <>
+          <CompareSides
+            sides={sides}
+            versions={versions}
+            choices={sideChoices(versions, seesDrafts)}
+            onChange={(next) => {
+              setSearch({ ...next }, { replace: true, preventScrollReset: true });
+            }}
+          />
+          <Compared calendarId={calendarId} sides={sides} seesDrafts={seesDrafts} />
+        </>
+      )}
+    </Page>
+  );
+}
+
+function Compared({
+  calendarId,
+  sides,
+  seesDrafts,
+}: {
+  calendarId: string;
+  sides: Sides;
+  seesDrafts: boolean;
+}) {
+  const { t } = useTranslation('versions');
+  const words = useProblemWords();
+  const [show, setShow] = useState<Show>('changed');
+  const comparison = useQuery({
+    ...comparisonQuery(calendarId, sides.from, sides.to),
+    enabled: sides.from !== sides.to,
+  });
+  if (sides.from === sides.to) return <p className="mt-4">{t('compare.sameSides')}</p>;
+  if (comparison.isPending) {
+    return (
+      <Board className="mt-4">
+        <Skeleton lines={5} />
+      </Board>
+    );
+  }
+  if (comparison.isError) {
+    return (
+      <TroubleNote
+        title={t('compare.trouble')}
+        sentence={words.problem(comparison.error)}
+        onRetry={() => void comparison.refetch()}
+      />
+    );
+  }
+  return (
+    <CompareResult
+      calendarId={calendarId}
+      comparison={comparison.data}
+      seesDrafts={seesDrafts}
+      show={show}
+      onShow={setShow}
+    />
+  );
+}

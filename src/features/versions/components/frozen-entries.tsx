@@ -1,0 +1,109 @@
+import { useTranslation } from 'react-i18next';
+import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
+import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
+import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
+import { More } from '#src/ui/fold.js';
+import { SignIcon } from '#src/ui/icons/drawn-icon.js';
+import { WindowBar } from '#src/ui/pictures/window-bar.js';
+import { Board } from '#src/ui/surfaces.js';
+import { Seal } from './seal-board.js';
+
+/** The entries of a version in their order, each with its days; everything else one press away. */
+export function FrozenEntries({ version }: { version: Version }) {
+  const { t } = useTranslation('versions');
+  const { header, entries } = version;
+  const markers: NamesByKey = new Map(header.markers.map((marker) => [marker.markerKey, marker]));
+  return (
+    <Board title={t('page.entries')}>
+      <p className="text-small text-umber-soft">{t('page.entriesHint')}</p>
+      <ol className="frozen-entries">
+        {entries.map((entry) => (
+          <li key={entry.entryId}>
+            <FrozenEntry entry={entry} header={header} markers={markers} />
+          </li>
+        ))}
+      </ol>
+    </Board>
+  );
+}
+
+interface FrozenEntryProps {
+  entry: VersionEntry;
+  header: VersionHeader;
+  markers: NamesByKey;
+}
+
+function FrozenEntry({ entry, header, markers }: FrozenEntryProps) {
+  const words = useEntryWords();
+  const dateWords = useDateWords();
+  const { content, dates } = entry;
+  const { year } = header;
+  return (
+    <div className="frozen-entry">
+      <SignIcon sign={content.icon} size={34} />
+      <div className="min-w-0">
+        <h3 className="text-body">
+          {content.titleOfficer}
+          {content.titleVillage !== '' && (
+            <span className="own-words text-umber-soft" lang={header.villageLanguage.tag}>
+              {' · '}
+              {content.titleVillage}
+            </span>
+          )}
+        </h3>
+        <p className="range-line">
+          <strong>{words.window(content, dates.window, year)}</strong>
+        </p>
+        <p className="range-line">{words.lead(content, markers)}</p>
+        {dates.window && (
+          <WindowBar
+            className="mt-2"
+            span={{ first: dayNumberOf(year, 1, 1), last: dayNumberOf(year, 12, 31) }}
+            days={windowDayNumbers(dates.window)}
+            kind={content.protectiveWatch ? 'watch' : 'work'}
+            label=""
+            height={9}
+            monthStarts={dateWords
+              .months(year)
+              .slice(1)
+              .map(({ dayNumber }) => dayNumber)}
+          />
+        )}
+        <EntryRest entry={entry} year={year} markers={markers} />
+      </div>
+    </div>
+  );
+}
+
+const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
+
+function EntryRest({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
+  const { t } = useTranslation('versions');
+  const facts = useEntryFacts().groups(entry.content, entry.dates, year, markers);
+  return (
+    <More label={t('page.moreOfIt')}>
+      <dl>
+        {GROUPS.flatMap((group) => facts[group]).map(({ key, label, value }) => (
+          <div key={key} className="fact">
+            <dt>{label}</dt>
+            <dd>{value}</dd>
+          </div>
+        ))}
+        <div className="fact">
+          <dt>{t('page.seal')}</dt>
+          <dd>
+            <Seal hash={entry.hash} />
+          </dd>
+        </div>
+        <div className="fact">
+          <dt>{t('seal.salt')}</dt>
+          <dd>
+            <Seal hash={entry.salt} />
+          </dd>
+        </div>
+      </dl>
+    </More>
+  );
+}

@@ -1,0 +1,67 @@
+import { useTranslation } from 'react-i18next';
+import type { FrozenMarker, Version } from '#shared/contracts/versions.js';
+import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { todayIn } from '#src/lib/days.js';
+import { windowDayNumbers } from '#src/lib/entry-words.js';
+import { useLaneWords } from '#src/lib/lane-words.js';
+import { markerName } from '#src/lib/marker-names.js';
+import { useWideScreen } from '#src/lib/wide-screen.js';
+import { More } from '#src/ui/fold.js';
+import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
+import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
+import { YearBoard } from '#src/ui/pictures/year-board.js';
+
+/** The year of a frozen version; on a phone each entry carries its own line instead. */
+export function FrozenStrip({ version }: { version: Version }) {
+  const { t } = useTranslation(['versions', 'calendars']);
+  const dates = useDateWords();
+  const laneWords = useLaneWords();
+  const isWide = useWideScreen();
+  const { header, entries } = version;
+  const { year } = header;
+  if (!isWide || entries.length === 0) return null;
+  const today = todayIn(header.place.timeZone);
+  return (
+    <section className="board mb-4" aria-label={t('page.strip')}>
+      <YearBoard
+        span={{ first: dayNumberOf(year, 1, 1), last: dayNumberOf(year, 12, 31) }}
+        months={dates.months(year)}
+        lanes={inOrderOfEntries(version).map((marker) => ({
+          key: marker.markerKey,
+          name: markerName(marker),
+          icon: <MarkerIcon markerKey={marker.markerKey} size={20} />,
+          segments: marker.strip,
+          label: laneWords(markerName(marker), marker.strip),
+        }))}
+        bars={entries.flatMap(({ entryId, content, dates: found }) =>
+          found.window
+            ? [
+                {
+                  key: entryId,
+                  name: content.titleOfficer,
+                  days: windowDayNumbers(found.window),
+                  kind: content.protectiveWatch ? ('watch' as const) : ('work' as const),
+                },
+              ]
+            : [],
+        )}
+        barsName={t('page.work')}
+        label={t('page.picture', { year, count: entries.length })}
+        today={dayNumberOf(today.year, today.month, today.day)}
+      />
+      <More label={t('calendars:strip.howToRead')}>
+        <LaneKey />
+        <div className="mt-2">
+          <WindowKey kinds={['best', 'margin', 'watch', 'fixed']} />
+        </div>
+      </More>
+    </section>
+  );
+}
+
+/** Lanes stand in the order in which the entries bring them, not in that of their keys. */
+function inOrderOfEntries({ header, entries }: Version): FrozenMarker[] {
+  const keys = entries.flatMap(({ content: { lead } }) => (lead.type === 'marker' ? [lead.markerKey] : []));
+  return [...header.markers].sort((a, b) => keys.indexOf(a.markerKey) - keys.indexOf(b.markerKey));
+}

@@ -1,0 +1,35 @@
+import { useMemo } from 'react';
+import { useTranslation } from 'react-i18next';
+import { useDateWords } from '#src/lib/date-words.js';
+import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
+import { markerName } from '#src/lib/marker-names.js';
+import type { CompareWords } from '../model/entry-sentences.js';
+
+/** Any year without a 29 February: a last date belongs to every year. */
+const PLAIN_YEAR = 2027;
+
+export function useCompareWords(year: number, markers: NamesByKey): CompareWords {
+  const { t } = useTranslation('calendars');
+  const dates = useDateWords();
+  const entryWords = useEntryWords();
+  const markerDays = useMarkerDayWords();
+  return useMemo(
+    () => ({
+      day: (iso) => dates.day(iso),
+      window: ({ content, dates: found }) => entryWords.window(content, found.window, year),
+      about: markerDays.about,
+      lead: (lead) => entryWords.leadAlone({ lead }, markers),
+      markerName: (markerKey) => {
+        const names = markers.get(markerKey);
+        return names ? markerName(names) : markerKey;
+      },
+      lastDate: ({ date, source }) =>
+        t('stale.lastDateIs', { day: dates.day({ year: PLAIN_YEAR, ...date }), source }),
+      kind: (kind) => t(`kind.${kind}`),
+      icon: (icon) => t(`icon.${icon}`),
+      level: (level) => t(`level.${level}`),
+    }),
+    [t, dates, entryWords, markerDays, markers, year],
+  );
+}

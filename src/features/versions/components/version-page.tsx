@@ -1,0 +1,128 @@
+import { useSuspenseQueries } from '@tanstack/react-query';
+import { GitCompareArrows, Layers, Printer } from 'lucide-react';
+import type { ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Navigate, useParams } from 'react-router-dom';
+import { wasPublished } from '#shared/calendar/version-state.js';
+import { submissionNumber, type Version, type VersionSummary } from '#shared/contracts/versions.js';
+import { calendarQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
+import { useDateWords } from '#src/lib/date-words.js';
+import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
+import { ButtonLink } from '#src/ui/button.js';
+import { Columns, Mast, Page } from '#src/ui/page.js';
+import { StateChip } from '#src/ui/state-chip.js';
+import { Board } from '#src/ui/surfaces.js';
+import { BasisBoard } from './basis-board.js';
+import { FrozenEntries } from './frozen-entries.js';
+import { FrozenStrip } from './frozen-strip.js';
+import { MissingBoard } from './missing-board.js';
+import { SealBoard } from './seal-board.js';
+import { SignaturesBoard } from './signatures-board.js';
+import { useVersionName } from './use-version-name.js';
+import { VersionActions } from './version-actions.js';
+
+interface VersionPageProps {
+  /** Signing and the way into the review: they belong to the reviews. */
+  review?: ((version: Version) => ReactNode) | undefined;
+}
+
+/** A version as it was frozen, what is missing before it is signed off, and what can be done with it. */
+export function VersionPage({ review }: VersionPageProps) {
+  const { calendarId = '', number = '' } = useParams();
+  const isNumber = submissionNumber.safeParse(number).success;
+  // "draft" is no frozen version: its page is the editor.
+  if (!isNumber) return <Navigate to={paths.calendar(calendarId)} replace />;
+  return <FrozenVersion calendarId={calendarId} number={Number(number)} review={review} />;
+}
+
+interface FrozenVersionProps extends VersionPageProps {
+  calendarId: string;
+  number: number;
+}
+
+function FrozenVersion({ calendarId, number, review }: FrozenVersionProps) {
+  const { t } = useTranslation('versions');
+  // Asked for together: one after the other would be three ways to the server.
+  const [{ data: calendar }, { data: version }, { data: versions }] = useSuspenseQueries({
+    queries: [calendarQuery(calendarId), versionQuery(calendarId, number), versionsQuery(calendarId)],
+  });
+  const older = versions.find((each) => each.number < number) ?? null;
+  const name = useVersionName()(version);
+  usePageTitle(name);
+  const isOpen = version.state === 'in-review' || version.state === 'signed-off';
+  return (
+    <Page>
+      <Mast
+        title={name}
+        under={
+          <span className="flex flex-wrap items-center gap-x-3 gap-y-1">
+            <StateChip state={version.state} />
+            <span>{t('page.under', { year: calendar.year, place: version.header.place.name })}</span>
+          </span>
+        }
+        backTo={paths.versions(calendarId)}
+      />
+      <Columns wider="first" className="mb-4">
+        <StateBoard version={version} older={older} review={review} />
+        {isOpen ? <MissingBoard version={version} /> : <SignaturesBoard version={version} />}
+      </Columns>
+      <FrozenStrip version={version} />
+      <Columns wider="first">
+        <FrozenEntries version={version} />
+        <div className="grid gap-4">
+          {isOpen && <SignaturesBoard version={version} />}
+          <BasisBoard header={version.header} />
+          <SealBoard version={version} />
+        </div>
+      </Columns>
+    </Page>
+  );
+}
+
+/** What its state means, who submitted it when, and the ways on. */
+function StateBoard({
+  version,
+  older,
+  review,
+}: {
+  version: Version;
+  older: VersionSummary | null;
+  review: VersionPageProps['review'];
+}) {
+  const { t } = useTranslation('versions');
+  const dates = useDateWords();
+  const { calendarId, number, state } = version;
+  return (
+    <Board>
+      <p className="text-lead">{t(`state.${state}`)}</p>
+      <p className="mt-1 text-small text-umber-soft">
+        {t('page.submitted', { name: version.submittedBy, when: dates.moment(version.submittedAt) })}
+        {version.publishedAt !== null && (
+          <> · {t('page.publishedAt', { when: dates.moment(version.publishedAt) })}</>
+        )}
+      </p>
+      <div className="mt-3 flex flex-wrap items-start gap-3">
+        {review?.(version)}
+        <VersionActions version={version} />
+        {wasPublished(state) && state !== 'recalled' && (
+          <ButtonLink to={paths.sheet(calendarId, { number })} icon={<Printer aria-hidden size={20} />}>
+            {t('page.sheet')}
+          </ButtonLink>
+        )}
+        {older && (
+          <ButtonLink
+            look="quiet"
+            to={paths.compare(calendarId, { from: older.number, to: number })}
+            icon={<GitCompareArrows aria-hidden size={20} />}
+          >
+            {t('page.compare')}
+          </ButtonLink>
+        )}
+        <ButtonLink look="quiet" to={paths.versions(calendarId)} icon={<Layers aria-hidden size={20} />}>
+          {t('page.versions')}
+        </ButtonLink>
+      </div>
+    </Board>
+  );
+}
