@@ -16,7 +16,6 @@ import {
   reasonOf,
   submit,
   takeBack,
-  versionPath,
   type Village,
 } from '#tests/support/calendar-api.js';
 
@@ -367,43 +366,5 @@ describe('a full calendar', () => {
     expect(reasonOf(await village.officer.post(`${entries}/${first.id}/restore`))).toBe(
       '409 too-many-entries',
     );
-  });
-});
-
-describe('while a submission is out', () => {
-  it('every write to the draft answers 409, and reading goes on', async () => {
-    const { id } = await addEntry(village.officer, calendar.id);
-    const { id: gone } = await addEntry(village.officer, calendar.id);
-    await village.officer.delete(`${entries}/${gone}`).expect(204);
-    const version = await submit(village.officer, calendar.id);
-    const writes = () => [
-      village.officer.post(entries, entryInput()),
-      village.officer.put(`${entries}/${id}`, { content: entryInput({ notes: 'late' }), version: 1 }),
-      village.officer.post(`${entries}/${id}/copy`),
-      village.officer.delete(`${entries}/${id}`),
-      village.officer.post(`${entries}/${gone}/restore`),
-      village.officer.put(`/api/calendars/${calendar.id}/order`, { entryIds: [id] }),
-    ];
-    for (const write of writes()) expect(reasonOf(await write)).toBe('409 draft-locked');
-    expect(await entriesOf(village.officer, calendar.id)).toHaveLength(1);
-    await takeBack(village.officer, version);
-    expect(outcomes(await Promise.all([village.officer.post(entries, entryInput())]))).toEqual(['201']);
-  });
-
-  it('an edit at the same moment as the submission is in it or refused, never lost', async () => {
-    let { id, version } = await addEntry(village.officer, calendar.id);
-    for (const notes of ['first', 'second', 'third', 'fourth']) {
-      const [saved, submitted] = await Promise.all([
-        village.officer.put(`${entries}/${id}`, { content: entryInput({ notes }), version }),
-        village.officer.post(`/api/calendars/${calendar.id}/versions`),
-      ]);
-      expect(submitted.status).toBe(201);
-      const frozen = submitted.body as Parameters<typeof takeBack>[1];
-      const isFrozen = frozen.entries[0]?.content.notes === notes;
-      expect(isFrozen ? '200' : '409 draft-locked').toBe(outcomes([saved])[0]);
-      await village.officer.get(versionPath(frozen)).expect(200);
-      await takeBack(village.officer, frozen);
-      ({ id, version } = (await entriesOf(village.officer, calendar.id))[0] ?? { id, version });
-    }
   });
 });

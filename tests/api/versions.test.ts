@@ -4,7 +4,7 @@ import { CalendarVersionEntity } from '#server/db/entities/calendar-version.enti
 import { CommunityEntity } from '#server/db/entities/community.entity.js';
 import { VersionEntryEntity } from '#server/db/entities/version-entry.entity.js';
 import type { Calendar, EntryInput } from '#shared/contracts/calendars.js';
-import type { Comparison, Version, VersionSummary } from '#shared/contracts/versions.js';
+import type { Version, VersionSummary } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { ENGINE_VERSION } from '#shared/sky/index.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -15,7 +15,6 @@ import {
   entriesOf,
   openVillage,
   outcomes,
-  publish,
   publishDraft,
   readVersion,
   reasonOf,
@@ -356,61 +355,5 @@ describe('who sees which version', () => {
     await officer.get(`${versions}/draft`).expect(422);
     await officer.get(`${versions}/0`).expect(422);
     await officer.get(`${versions}/1x`).expect(422);
-  });
-});
-
-describe('comparing', () => {
-  const compare = async (client: Client, from: string, to: string) =>
-    (await client.get(`/api/calendars/${calendar.id}/comparison?from=${from}&to=${to}`).expect(200))
-      .body as Comparison;
-
-  it('finds what was added, taken out, changed and kept between two versions', async () => {
-    const first = await submit(officer, calendar.id);
-    await takeBack(officer, first);
-    const offsets = { earliestDays: 5, bestFromDays: 9, bestToDays: 25, lastAdvisedDays: 30 };
-    await edit(0, { offsets });
-    await officer
-      .delete(`/api/calendars/${calendar.id}/entries/${first.entries[1]?.entryId ?? ''}`)
-      .expect(204);
-    await addEntry(officer, calendar.id, { titleOfficer: 'Weed', crop: 'millet' });
-    await submit(officer, calendar.id);
-    const result = await compare(village.elder, '1', '2');
-    expect(result).toMatchObject({
-      from: '1',
-      to: '2',
-      year: 2027,
-      counts: { added: 1, removed: 1, changed: 1, same: 0 },
-      header: [],
-    });
-    expect(result.entries.map(({ change, titleOfficer }) => `${change} ${titleOfficer}`)).toEqual([
-      'changed Sow long millet',
-      'added Weed',
-      'removed Seed check',
-    ]);
-    expect(result.entries[0]?.fields.map(({ field }) => field)).toEqual(['offsets', 'dates.window']);
-    expect(result.entries[0]?.fields[0]).toMatchObject({
-      before: { bestFromDays: 7 },
-      after: { bestFromDays: 9 },
-    });
-  });
-
-  it('takes the draft as either side, for those who see it, and says what moved with the place', async () => {
-    const observer = await api.signIn('observer');
-    await publish(village, await submit(officer, calendar.id));
-    expect(await compare(officer, '1', 'draft')).toMatchObject({
-      counts: { added: 0, removed: 0, changed: 0, same: 2 },
-      header: [],
-    });
-    await changePlace(api, village.placeId, { sameSideShiftDeg: 2 });
-    const moved = await compare(officer, '1', 'draft');
-    expect(moved.header).toEqual([{ field: 'place.sameSideShiftDeg', before: 0, after: 2 }]);
-    expect(moved.counts).toMatchObject({ changed: 2 });
-    expect((await compare(officer, 'draft', '1')).header).toEqual([
-      { field: 'place.sameSideShiftDeg', before: 2, after: 0 },
-    ]);
-    const hidden = `/api/calendars/${calendar.id}/comparison`;
-    await observer.get(`${hidden}?from=1&to=draft`).expect(404);
-    await observer.get(`${hidden}?from=1&to=1`).expect(200);
-    await officer.get(`${hidden}?from=1&to=nine`).expect(422);
   });
 });
