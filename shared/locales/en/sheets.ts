@@ -19,6 +19,8 @@ export const texts = {
   sheets_one: '{{count}} sheet of A4, black only.',
   sheets_other: '{{count}} sheets of A4, black only.',
   fileSize: 'The file is about {{size}} MB.',
+  missingLetters:
+    'These letters are in none of the printed typefaces and would print as empty boxes: {{letters}}. Write them another way first.',
   pages: 'All pages',
   pageOf: 'Page {{page}} of {{total}}, true proportions.',
   realSize: 'Look at it at real size',

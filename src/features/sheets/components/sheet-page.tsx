@@ -6,6 +6,7 @@ import { SHEET_LAYOUTS, type SheetLayout } from '#shared/contracts/sheets.js';
 import type { VersionSummary } from '#shared/contracts/versions.js';
 import { calendarQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { useRoles } from '#src/lib/community.js';
+import { listWords } from '#src/lib/list-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -70,7 +71,7 @@ function SheetDesk({
   under: string;
   versions: readonly VersionSummary[];
 }) {
-  const { t } = useTranslation('sheets');
+  const { t, i18n } = useTranslation('sheets');
   const words = useProblemWords();
   const seesDraft = useRoles().is('officer', 'elder', 'steward');
   const [search, setSearch] = useSearchParams();
@@ -150,6 +151,13 @@ function SheetDesk({
           {sheet.isPending && <Skeleton lines={10} />}
           {sheet.error !== null && (
             <TroubleNote sentence={words.problem(sheet.error)} onRetry={() => void sheet.refetch()} />
+          )}
+          {sheet.data && sheet.data.missingLetters.length > 0 && (
+            <Care className="mb-4">
+              <p>
+                {t('missingLetters', { letters: listWords(sheet.data.missingLetters, i18n.language) })}
+              </p>
+            </Care>
           )}
           {sheet.data && <PageBrowser key={layout} pages={sheet.data.pages} />}
           <WallSteps layout={layout} />
