@@ -154,9 +154,7 @@ function SheetDesk({
           )}
           {sheet.data && sheet.data.missingLetters.length > 0 && (
             <Care className="mb-4">
-              <p>
-                {t('missingLetters', { letters: listWords(sheet.data.missingLetters, i18n.language) })}
-              </p>
+              <p>{t('missingLetters', { letters: listWords(sheet.data.missingLetters, i18n.language) })}</p>
             </Care>
           )}
           {sheet.data && <PageBrowser key={layout} pages={sheet.data.pages} />}
