@@ -1,5 +1,6 @@
+import { ReviewBoard } from '#src/features/reviews/components/review-board.js';
 import { VersionPage } from '#src/features/versions/components/version-page.js';
 
 export function Component() {
-  return <VersionPage />;
+  return <VersionPage review={(version) => <ReviewBoard version={version} />} />;
 }

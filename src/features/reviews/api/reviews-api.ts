@@ -1,6 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { reviewsEndpoints, type AnswerInput } from '#shared/contracts/reviews.js';
-import { versionsEndpoints } from '#shared/contracts/versions.js';
 import { callApi } from '#src/lib/api-client.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
 
@@ -10,15 +9,6 @@ export interface VersionRef {
 }
 
 const paramsOf = ({ calendarId, number }: VersionRef) => ({ calendarId, number: String(number) });
-
-/** The frozen submission. It never changes, but its state and what the person may do now does. */
-export function versionQuery({ calendarId, number }: VersionRef) {
-  return queryOptions({
-    queryKey: [...calendarKeys.version(calendarId, number), 'version'],
-    queryFn: ({ signal }) =>
-      callApi(versionsEndpoints.read, { params: paramsOf({ calendarId, number }), signal }),
-  });
-}
 
 /** What was said to its entries, and how far each elder is. */
 export function answersQuery({ calendarId, number }: VersionRef) {

@@ -1,12 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
+import { versionQuery } from '#src/lib/calendar-queries.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
-import { answersQuery, versionQuery } from '../api/reviews-api.js';
+import { answersQuery } from '../api/reviews-api.js';
 import { ReviewRound } from './review-round.js';
 
 /** An elder's review of a submission: one entry at a time, in large type. */
@@ -15,7 +16,7 @@ export function ReviewPage() {
   const { calendarId = '', number = '' } = useParams();
   const ref = { calendarId, number: Number(number) };
   const words = useProblemWords();
-  const version = useQuery(versionQuery(ref));
+  const version = useQuery(versionQuery(calendarId, ref.number));
   const answers = useQuery(answersQuery(ref));
   usePageTitle(t('title', { year: version.data?.header.year ?? '' }));
 

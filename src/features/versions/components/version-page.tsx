@@ -23,7 +23,7 @@ import { useVersionName } from './use-version-name.js';
 import { VersionActions } from './version-actions.js';
 
 interface VersionPageProps {
-  /** Signing and the way into the review: they belong to the reviews. */
+  /** How far the elders are, the way into the review and signing: they belong to the reviews. */
   review?: ((version: Version) => ReactNode) | undefined;
 }
 
@@ -64,9 +64,10 @@ function FrozenVersion({ calendarId, number, review }: FrozenVersionProps) {
         backTo={paths.versions(calendarId)}
       />
       <Columns wider="first" className="mb-4">
-        <StateBoard version={version} older={older} review={review} />
+        <StateBoard version={version} older={older} />
         {isOpen ? <MissingBoard version={version} /> : <SignaturesBoard version={version} />}
       </Columns>
+      {review !== undefined && <div className="mb-4">{review(version)}</div>}
       <FrozenStrip version={version} />
       <Columns wider="first">
         <FrozenEntries version={version} />
@@ -81,15 +82,7 @@ function FrozenVersion({ calendarId, number, review }: FrozenVersionProps) {
 }
 
 /** What its state means, who submitted it when, and the ways on. */
-function StateBoard({
-  version,
-  older,
-  review,
-}: {
-  version: Version;
-  older: VersionSummary | null;
-  review: VersionPageProps['review'];
-}) {
+function StateBoard({ version, older }: { version: Version; older: VersionSummary | null }) {
   const { t } = useTranslation('versions');
   const dates = useDateWords();
   const { calendarId, number, state } = version;
@@ -103,7 +96,6 @@ function StateBoard({
         )}
       </p>
       <div className="mt-3 flex flex-wrap items-start gap-3">
-        {review?.(version)}
         <VersionActions version={version} />
         {wasPublished(state) && state !== 'recalled' && (
           <ButtonLink to={paths.sheet(calendarId, { number })} icon={<Printer aria-hidden size={20} />}>

@@ -1,0 +1,113 @@
+import type { Page } from '@playwright/test';
+import { expect, test } from '#tests/support/journey.js';
+import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+
+/*
+ * An officer with a new place: coordinates as degrees and minutes, a skyline from a pasted table, a calendar for 2027
+ * with five entries, and the submission that freezes them.
+ */
+
+const WORK = [
+  { title: 'Clean the channels', star: 'Pleiades' },
+  { title: 'Sow the lower field', star: 'Aldebaran' },
+  { title: 'Weed the lower field', star: 'Sirius' },
+  { title: 'Guard against birds', star: 'Regulus' },
+  { title: 'Bring the harvest in', star: 'Spica' },
+];
+
+test('an officer goes from an empty place to a submission of five entries', async ({ page }) => {
+  test.setTimeout(180_000);
+  await signIn(page, 'officer');
+  await makePlace(page);
+  await expectAccessible(page);
+
+  await page.getByRole('link', { name: 'Calendar' }).click();
+  await page.getByRole('combobox', { name: /^Place/ }).selectOption({ label: 'Lower field' });
+  await page.getByRole('button', { name: 'Begin 2027' }).click();
+  await expect(page.getByText('No entries yet')).toBeVisible();
+
+  await page.getByRole('button', { name: 'Add the first entry' }).click();
+  await refusedWithoutATitle(page);
+  for (const [index, { title, star }] of WORK.entries()) {
+    if (index > 0) await page.getByRole('button', { name: 'Add an entry' }).click();
+    await addEntry(page, title, star);
+  }
+  await expectAccessible(page);
+
+  await page.getByRole('button', { name: 'Submit for review' }).click();
+  await expect(page.getByText('5 entries as they are saved now, with their days')).toBeVisible();
+  await page
+    .getByRole('dialog')
+    .getByRole('button', { name: /Submit/ })
+    .click();
+  await expect(page.getByText('The draft is locked')).toBeVisible();
+});
+
+test('what an officer typed survives a reload', async ({ page }) => {
+  await signIn(page, 'officer');
+  await page.goto('/places/new');
+  await page.getByLabel('Name of the place').fill('The far spring');
+  await page.getByLabel('Latitude').fill('12° 75′ N');
+  await page.getByLabel('Longitude').click();
+  await expect(page.getByText('Minutes go up to 59. What you typed is still here; change 75.')).toBeVisible();
+  await expect(page.getByText(/kept on this device/).or(page.getByText('Name of the place'))).toBeVisible();
+  // The text is kept after a short pause in typing.
+  await expect
+    .poll(() => page.evaluate(() => JSON.stringify(Object.values(localStorage))), { timeout: 5_000 })
+    .toContain('The far spring');
+  await page.reload();
+  await expect(page.getByLabel('Name of the place')).toHaveValue('The far spring');
+  await expect(page.getByLabel('Latitude')).toHaveValue('12° 75′ N');
+});
+
+test('the stars and the editor fit a phone of 320 pixels', async ({ page }) => {
+  await page.setViewportSize({ width: 320, height: 640 });
+  await signIn(page, 'officer');
+  await page.goto('/stars?year=2027');
+  await expect(page.getByText(/Good markers here/)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await expectAccessible(page);
+  await page.getByRole('link', { name: 'Calendar' }).click();
+  await page
+    .getByRole('link', { name: /Read the draft|Open the draft/ })
+    .first()
+    .click();
+  await expect(page.getByRole('heading', { name: 'Calendar 2027' })).toBeVisible();
+  await expectNoSidewaysScroll(page);
+});
+
+async function makePlace(page: Page): Promise<void> {
+  await page.goto('/places/new');
+  await page.getByLabel('Name of the place').fill('Lower field');
+  await page.getByLabel('Latitude').fill('11° 48′ N');
+  await page.getByLabel('Longitude').fill('39° 06′ E');
+  await page.getByLabel('Height, metres').fill('1720');
+  await expect(page.getByText('Africa/Addis')).toBeVisible();
+  await page.getByText('Paste or load a table instead').click();
+  const table = page.getByLabel('Skyline table');
+  await table.fill('0, 1\n90, high\n180, 2\n360, 1');
+  await expect(page.getByText(/high/).last()).toBeVisible();
+  await table.fill('0, 1\n90, 4\n180, 2\n270, 1.5\n360, 1');
+  await page.getByRole('button', { name: 'Use this table' }).click();
+  await page.getByRole('button', { name: 'Save the place' }).click();
+  await expect(page.getByText('Lower field is there.')).toBeVisible();
+}
+
+async function refusedWithoutATitle(page: Page): Promise<void> {
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(page.getByText('Fill this in.').first()).toBeVisible();
+}
+
+async function addEntry(page: Page, title: string, star: string): Promise<void> {
+  await page.getByLabel(/^Name of the work or rite/).fill(title);
+  await page.getByRole('button', { name: 'Choose a star or figure' }).click();
+  const dialog = page.getByRole('dialog');
+  await dialog.getByLabel('Find it by name, letter or HR number').fill(star);
+  await dialog
+    .getByRole('button', { name: new RegExp(star) })
+    .first()
+    .click();
+  await page.getByRole('radio', { name: /First morning seen/ }).check();
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(page.getByText(`Saved: ${title}.`)).toBeVisible();
+}
