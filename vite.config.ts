@@ -31,6 +31,7 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/unit/{shared,server}/**/*.test.ts'],
           setupFiles: [quiet],
+          testTimeout: 30_000,
         },
       },
       {
@@ -40,6 +41,8 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['tests/unit/src/**/*.test.{ts,tsx}'],
           setupFiles: [quiet, './tests/support/dom-setup.ts'],
+          // Typing letter by letter takes its time on a machine that does other work as well.
+          testTimeout: 30_000,
         },
       },
       {

@@ -77,7 +77,8 @@ test('the steward’s signature completes the rule, and the officer publishes', 
   const office = await browser.newPage();
   await signIn(office, 'officer');
   await office.getByRole('link', { name: /is signed off/ }).click();
-  await office.getByRole('button', { name: 'Publish' }).click();
-  await expect(office.getByText(/Published 2027-2/).first()).toBeVisible();
+  await office.getByRole('button', { name: 'Publish it' }).click();
+  await office.getByRole('dialog').getByRole('button', { name: 'Publish it' }).click();
+  await expect(office.getByRole('heading', { level: 1 })).toContainText('2027-2');
   await office.close();
 });
