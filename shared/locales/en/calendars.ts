@@ -122,6 +122,8 @@ export const texts = {
     submit: 'Submit for review',
     save: 'Save the entry',
     nothingToSave: 'nothing is changed',
+    nothingChanged: 'Nothing is changed.',
+    chooseFirstNote: 'Choose first what stays.',
     chooseFirst: 'choose first what stays',
     add: 'Add an entry',
     addFirst: 'Add the first entry',
@@ -216,6 +218,7 @@ export const texts = {
     titleVillage: 'In the words of the village ({{language}})',
     kind: 'Kind',
     icon: 'Picture on the board',
+    changeIcon: 'Choose another picture',
     crop: 'Crop or variety',
     notes: 'Notes',
     notesHint: 'Where, who, how. Shown beside the entry, not printed on the board.',
@@ -361,7 +364,7 @@ export const texts = {
 
   stale: {
     title: 'Two people wrote to this entry',
-    lead: '{{name}} saved a newer text {{when}}. Choose what stays; nothing of yours is lost until you have chosen.',
+    lead: '{{name}} saved a newer text ({{when}}). Choose what stays; nothing of yours is lost until you have chosen.',
     unit: {
       titleOfficer: 'Name',
       titleVillage: 'Name in the words of the village',

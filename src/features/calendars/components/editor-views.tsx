@@ -1,15 +1,15 @@
-import { Check, GitCompareArrows, Layers, Plus, Send } from 'lucide-react';
+import { Plus } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { paths } from '#src/lib/paths.js';
-import { Button, ButtonLink } from '#src/ui/button.js';
+import { Button } from '#src/ui/button.js';
 import { Mast, Page, ThumbBar } from '#src/ui/page.js';
-import { StateChip } from '#src/ui/state-chip.js';
 import type { FormState } from '../model/form-state.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
 import { EditorStrip } from './editor-strip.js';
+import { DraftState, SaveButton, ToolLinks, useSaveReason } from './editor-tools.js';
 import { EntryForm } from './entry-form.js';
 import { EntryList } from './entry-list.js';
 import { EntryReading } from './entry-reading.js';
@@ -30,12 +30,18 @@ export interface ViewParts {
 export function WideView(parts: ViewParts) {
   const { t } = useTranslation('calendars');
   const { editor, actions, form } = parts;
+  const closed = useSaveReason(editor);
   return (
     <Page>
       <Mast title={t('editor.title', { year: editor.calendar.year })} under={<DraftState editor={editor} />}>
-        <div className="flex flex-wrap items-center justify-end gap-3">
+        <div className="flex flex-wrap items-start justify-end gap-3">
           <ToolLinks {...parts} />
-          {editor.canWrite && editor.selected !== null && <SaveButton {...parts} />}
+          {editor.canWrite && editor.selected !== null && (
+            <div>
+              <SaveButton {...parts} />
+              {closed && <p className="text-center text-small text-umber-soft">{closed.note}</p>}
+            </div>
+          )}
         </div>
       </Mast>
       <Notes {...parts} />
@@ -83,6 +89,7 @@ export function EntryView(parts: ViewParts) {
   const { t } = useTranslation('calendars');
   const { editor } = parts;
   const { calendar, shown, selected } = editor;
+  const closed = useSaveReason(editor);
   const position = shown.findIndex((entry) => entry.id === selected?.id) + 1;
   const where =
     selected?.saved === null
@@ -97,7 +104,7 @@ export function EntryView(parts: ViewParts) {
       <Notes {...parts} />
       <OpenEntry {...parts} />
       {editor.canWrite && (
-        <ThumbBar>
+        <ThumbBar note={closed?.note}>
           <SaveButton {...parts} />
         </ThumbBar>
       )}
@@ -137,67 +144,5 @@ function OpenEntry({ editor, saving, actions, form }: ViewParts) {
       saving={saving}
       actions={actions}
     />
-  );
-}
-
-function SaveButton({ editor, saving }: ViewParts) {
-  const { t } = useTranslation('calendars');
-  const { selected, stale } = editor;
-  const reason = stale
-    ? t('editor.chooseFirst')
-    : selected?.saved && !selected.unsaved
-      ? t('editor.nothingToSave')
-      : undefined;
-  return (
-    <Button
-      look="main"
-      icon={<Check aria-hidden size={24} />}
-      busy={saving.isSaving}
-      closedBecause={reason}
-      onClick={() => void saving.save()}
-    >
-      {t('editor.save')}
-    </Button>
-  );
-}
-
-function ToolLinks({ editor, onSubmit }: ViewParts) {
-  const { t } = useTranslation('calendars');
-  const { calendar, canWrite, shown } = editor;
-  return (
-    <>
-      <ButtonLink to={paths.versions(calendar.id)} icon={<Layers aria-hidden size={20} />}>
-        {t('editor.versions')}
-      </ButtonLink>
-      {editor.lastNumber !== null && (
-        <ButtonLink to={paths.compare(calendar.id)} icon={<GitCompareArrows aria-hidden size={20} />}>
-          {t('editor.compare')}
-        </ButtonLink>
-      )}
-      {canWrite && shown.length > 0 && (
-        <Button icon={<Send aria-hidden className="turns" size={20} />} onClick={onSubmit}>
-          {t('editor.submit')}
-        </Button>
-      )}
-    </>
-  );
-}
-
-/** Draft or locked, where, and what is not saved yet. */
-function DraftState({ editor }: { editor: Editor }) {
-  const { t } = useTranslation('calendars');
-  const { calendar, lastNumber, unsavedIds } = editor;
-  const chip = calendar.locked
-    ? t('editor.locked')
-    : lastNumber === null
-      ? t('editor.draft')
-      : t('editor.afterSubmission', { number: lastNumber });
-  return (
-    <span className="flex flex-wrap items-center gap-x-3 gap-y-1">
-      <StateChip state="draft">{chip}</StateChip>
-      <span>{t('editor.place', { place: calendar.placeName })}</span>
-      {unsavedIds.length > 0 && <span>{t('editor.unsaved', { count: unsavedIds.length })}</span>}
-      {!editor.isOfficer && <span>{t('editor.readOnly')}</span>}
-    </span>
   );
 }

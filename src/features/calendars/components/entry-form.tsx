@@ -1,11 +1,10 @@
-import { Copy, Trash2 } from 'lucide-react';
-import { useEffect, useId, useRef, useState } from 'react';
+import { useId, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useEntryFacts } from '#src/lib/entry-facts.js';
-import { Button, IconButton } from '#src/ui/button.js';
+import { Button } from '#src/ui/button.js';
 import { Fold } from '#src/ui/fold.js';
 import { Care } from '#src/ui/surfaces.js';
-import { groupsWithProblems, type FieldGroup } from '../model/field-problems.js';
+import type { FieldGroup } from '../model/field-problems.js';
 import type { FormState } from '../model/form-state.js';
 import type { ShownEntry } from '../model/preview-dates.js';
 import type { Editor } from '../model/use-editor.js';
@@ -14,15 +13,17 @@ import type { SaveEntry } from '../model/use-save-entry.js';
 import type { Way } from '../model/warning-ways.js';
 import { ElderRequests } from './elder-requests.js';
 import { EntryHeading } from './entry-heading.js';
+import { EntryTools } from './entry-tools.js';
 import { EntryWarnings } from './entry-warnings.js';
 import { MarkerDialog } from './marker-dialog.js';
 import { LateFields, SignsFields, WhoseFields } from './other-fields.js';
 import { StaleChoice } from './stale-choice.js';
 import { UnsavedLine } from './unsaved-line.js';
+import { useGroups, type Groups } from './use-groups.js';
 import { WhatFields } from './what-fields.js';
 import { WhenFields } from './when-fields.js';
 
-interface EntryFormProps {
+export interface EntryFormProps {
   editor: Editor;
   entry: ShownEntry;
   form: FormState;
@@ -30,98 +31,26 @@ interface EntryFormProps {
   actions: EntryActions;
 }
 
-const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
-
-/** One entry as a form whose groups close to one line. */
+/** One entry to be written: what elders asked, what to look at, and groups that close to one line. */
 export function EntryForm({ editor, entry, form, saving, actions }: EntryFormProps) {
   const { t } = useTranslation('calendars');
   const headingId = useId();
   const board = useRef<HTMLElement>(null);
-  const isNew = entry.saved === null;
-  const [opened, setOpened] = useState<ReadonlySet<FieldGroup>>(
-    () => new Set(isNew ? ['what', 'when'] : ['when']),
-  );
   const [isChoosing, setIsChoosing] = useState(false);
-  const lines = useFoldLines(form);
-  useFirstProblemInSight(board, saving, setOpened);
-
-  const openGroup = (group: FieldGroup) => {
-    setOpened((before) => new Set(before).add(group));
-    // The fold opens with the next drawing; only then can the focus go into it.
-    requestAnimationFrame(() => {
-      board.current
-        ?.querySelector<HTMLElement>(`[data-group="${group}"] :is(input, textarea, select)`)
-        ?.focus();
-    });
-  };
-  const goWay = (way: Way) => {
-    switch (way.kind) {
-      case 'otherStar':
-        setIsChoosing(true);
-        return;
-      case 'fixedDate':
-        form.change({ leadType: 'fixed-date' });
-        openGroup('when');
-        return;
-      case 'otherDay':
-        form.change(({ marker }) => ({ marker: { ...marker, phenomenon: way.phenomenon, occurrence: 1 } }));
-        return;
-      case 'useFirst':
-        form.change(({ marker }) => ({ marker: { ...marker, occurrence: 1 } }));
-        return;
-      case 'agreed':
-        form.change({ agreedToPrint: true });
-        return;
-      case 'writeSigns':
-        openGroup('signs');
-        return;
-      case 'changeDays':
-      case 'changeLastDate':
-        openGroup('when');
-    }
-  };
   const { saved } = entry;
+  const groups = useGroups(board, saved ? ['when'] : ['what', 'when'], saving);
+  const { isWide } = editor.selection;
   const answers = editor.answers.get(entry.id);
   const edit = editor.edits.all.get(entry.id);
-  const fields: Record<FieldGroup, React.ReactNode> = {
-    what: <WhatFields form={form} />,
-    when: (
-      <WhenFields
-        form={form}
-        onSearch={() => {
-          setIsChoosing(true);
-        }}
-      />
-    ),
-    signs: <SignsFields form={form} />,
-    late: <LateFields form={form} />,
-    whose: <WhoseFields form={form} />,
+  const search = () => {
+    setIsChoosing(true);
   };
 
   return (
     <section ref={board} className="board @container" aria-labelledby={headingId}>
-      <div className="flex flex-wrap items-center justify-between gap-2">
+      <div className="flex items-center justify-between gap-2">
         <EntryHeading id={headingId} content={entry.content} villageLanguage={form.villageLanguage} />
-        {saved && (
-          <div className="flex gap-2">
-            <IconButton
-              label={t('editor.duplicate')}
-              icon={<Copy aria-hidden size={22} />}
-              closed={actions.isBusy}
-              onClick={() => {
-                actions.duplicate(saved);
-              }}
-            />
-            <IconButton
-              label={t('editor.takeOut')}
-              icon={<Trash2 aria-hidden size={22} />}
-              closed={actions.isBusy}
-              onClick={() => {
-                actions.takeOut(saved);
-              }}
-            />
-          </div>
-        )}
+        {saved && isWide && <EntryTools entry={saved} actions={actions} />}
       </div>
       {answers && saved && editor.lastNumber !== null && (
         <ElderRequests
@@ -130,15 +59,9 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
           number={editor.lastNumber}
           entryId={entry.id}
           ways={{
-            changeDays: () => {
-              openGroup('when');
-            },
-            changeWords: () => {
-              openGroup('what');
-            },
-            takeOut: () => {
-              actions.takeOut(saved);
-            },
+            changeDays: () => groups.goTo('when'),
+            changeWords: () => groups.goTo('what'),
+            takeOut: () => actions.takeOut(saved),
           }}
         />
       )}
@@ -155,38 +78,30 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
           mine={entry.content}
           markers={form.markers ?? new Map()}
           isSaving={saving.isSaving}
-          onSave={(content) => void saving.saveJoined(content, saved.version)}
-          onTakeTheirs={() => {
-            actions.throwAway(entry);
-          }}
+          onSave={(content) => void saving.saveJoined(content, saved)}
+          onTakeTheirs={() => actions.throwAway(entry)}
         />
       ) : (
         <>
-          <EntryWarnings form={form} entry={entry} all={editor.shown} onWay={goWay} />
-          <div className="mt-3">
-            {GROUPS.map((group) => (
-              <div key={group} data-group={group}>
-                <Fold
-                  title={t(`form.group.${group}`)}
-                  line={lines[group] || t('form.nothing')}
-                  open={opened.has(group)}
-                  onToggle={(isOpen) => {
-                    setOpened((before) => toggled(before, group, isOpen));
-                  }}
-                >
-                  {fields[group]}
-                </Fold>
-              </div>
-            ))}
-          </div>
+          <EntryWarnings
+            form={form}
+            entry={entry}
+            all={editor.shown}
+            onWay={(way) => goWay(way, form, groups, search)}
+          />
+          <GroupFolds form={form} groups={groups} onSearch={search} />
           <UnsavedLine editor={editor} entry={entry} actions={actions} />
         </>
       )}
+      {saved && !isWide && <EntryTools entry={saved} actions={actions} inWords />}
+      {!saved && (
+        <Button look="quiet" onClick={() => actions.throwAway(entry)}>
+          {t('editor.throwNewAway')}
+        </Button>
+      )}
       <MarkerDialog
         isOpen={isChoosing}
-        onClose={() => {
-          setIsChoosing(false);
-        }}
+        onClose={() => setIsChoosing(false)}
         rows={editor.markers.data?.rows ?? []}
         year={form.year}
         phenomenon={form.draft.marker.phenomenon}
@@ -199,63 +114,70 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
           }));
         }}
       />
-      {!saved && (
-        <Button
-          look="quiet"
-          onClick={() => {
-            actions.throwAway(entry);
-          }}
-        >
-          {t('editor.throwNewAway')}
-        </Button>
-      )}
     </section>
   );
 }
 
-function toggled(
-  groups: ReadonlySet<FieldGroup>,
-  group: FieldGroup,
-  isOpen: boolean,
-): ReadonlySet<FieldGroup> {
-  if (groups.has(group) === isOpen) return groups;
-  const next = new Set(groups);
-  if (isOpen) next.add(group);
-  else next.delete(group);
-  return next;
+const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
+
+interface GroupFoldsProps {
+  form: FormState;
+  groups: Groups;
+  onSearch: () => void;
 }
 
-/** What each closed group says in one line. */
-function useFoldLines(form: FormState): Record<FieldGroup, string> {
+function GroupFolds({ form, groups, onSearch }: GroupFoldsProps) {
+  const { t } = useTranslation('calendars');
   const facts = useEntryFacts().groups(form.content, form.dates, form.year, form.markers ?? new Map());
-  const line = (group: FieldGroup) => facts[group].map(({ value }) => value).join(' · ');
-  return {
-    what: line('what'),
-    when: line('when'),
-    signs: line('signs'),
-    late: line('late'),
-    whose: line('whose'),
+  const fields: Record<FieldGroup, ReactNode> = {
+    what: <WhatFields form={form} />,
+    when: <WhenFields form={form} onSearch={onSearch} />,
+    signs: <SignsFields form={form} />,
+    late: <LateFields form={form} />,
+    whose: <WhoseFields form={form} />,
   };
+  return (
+    <div className="mt-3">
+      {GROUPS.map((group) => (
+        <div key={group} data-group={group}>
+          <Fold
+            title={t(`form.group.${group}`)}
+            line={facts[group].map(({ value }) => value).join(' · ') || t('form.nothing')}
+            open={groups.opened.has(group)}
+            onToggle={(isOpen) => groups.toggle(group, isOpen)}
+          >
+            {fields[group]}
+          </Fold>
+        </div>
+      ))}
+    </div>
+  );
 }
 
-/** After a try to save that was refused: opens the groups concerned and brings the first field into sight. */
-function useFirstProblemInSight(
-  board: React.RefObject<HTMLElement | null>,
-  { attempt, problems }: SaveEntry,
-  setOpened: (change: (before: ReadonlySet<FieldGroup>) => ReadonlySet<FieldGroup>) => void,
-): void {
-  const newest = useRef(problems);
-  useEffect(() => {
-    newest.current = problems;
-  });
-  useEffect(() => {
-    if (attempt === 0) return undefined;
-    setOpened((before) => new Set([...before, ...groupsWithProblems(newest.current)]));
-    const frame = requestAnimationFrame(() => {
-      board.current?.querySelector<HTMLElement>(':is([aria-invalid="true"], button[data-invalid])')?.focus();
-    });
-    return () => {
-      cancelAnimationFrame(frame);
-    };
-  }, [attempt, board, setOpened]);
+/** Does what a way out of a warning says. */
+function goWay(way: Way, form: FormState, groups: Groups, search: () => void): void {
+  switch (way.kind) {
+    case 'otherStar':
+      search();
+      return;
+    case 'fixedDate':
+      form.change({ leadType: 'fixed-date' });
+      groups.goTo('when');
+      return;
+    case 'otherDay':
+      form.change(({ marker }) => ({ marker: { ...marker, phenomenon: way.phenomenon, occurrence: 1 } }));
+      return;
+    case 'useFirst':
+      form.change(({ marker }) => ({ marker: { ...marker, occurrence: 1 } }));
+      return;
+    case 'agreed':
+      form.change({ agreedToPrint: true });
+      return;
+    case 'writeSigns':
+      groups.goTo('signs');
+      return;
+    case 'changeDays':
+    case 'changeLastDate':
+      groups.goTo('when');
+  }
 }

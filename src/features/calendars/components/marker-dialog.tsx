@@ -39,7 +39,7 @@ function MarkerChoice({ rows, year, phenomenon, chosen, inUse, onChoose, onClose
   useEffect(() => {
     field.current?.focus();
   }, []);
-  const found = findMarkers(rows, typed, inUse);
+  const found = findMarkers(rows, typed, inUse, chosen);
   const shown = found.slice(0, SHOWN_MAX);
   return (
     <div className="grid gap-3">

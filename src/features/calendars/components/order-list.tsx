@@ -75,7 +75,7 @@ export function OrderList({ editor, actions }: { editor: Editor; actions: EntryA
             </button>
             <SignIcon sign={entry.content.icon} size={28} />
             <span className="min-w-0">{title(entry)}</span>
-            <span className="flex">
+            <span className="flex gap-1">
               <IconButton
                 label={t('order.up', { title: title(entry) })}
                 icon={<ArrowUp aria-hidden size={20} />}

@@ -1,9 +1,8 @@
 import { useTranslation } from 'react-i18next';
-import { ENTRY_ICONS, ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
+import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
 import { SelectField, TextAreaField, TextField } from '#src/ui/field.js';
-import { SignIcon } from '#src/ui/icons/drawn-icon.js';
-import { PickGroup } from '#src/ui/pick.js';
 import type { FormState } from '../model/form-state.js';
+import { IconField } from './icon-field.js';
 
 /** What is done: its name in both languages, its kind and picture, crop, notes and caution. */
 export function WhatFields({ form }: { form: FormState }) {
@@ -54,19 +53,7 @@ export function WhatFields({ form }: { form: FormState }) {
           }}
         />
       </div>
-      <PickGroup
-        label={t('form.icon')}
-        value={draft.icon}
-        problem={at('icon')}
-        onChange={(icon) => {
-          change({ icon });
-        }}
-        options={ENTRY_ICONS.map((icon) => ({
-          value: icon,
-          label: t(`icon.${icon}`),
-          icon: <SignIcon sign={icon} size={30} />,
-        }))}
-      />
+      <IconField form={form} />
       <TextAreaField
         label={t('form.notes')}
         hint={t('form.notesHint')}

@@ -5,18 +5,22 @@ import { textFits } from '#src/ui/combo-field.js';
 export const SHOWN_MAX = 30;
 
 /**
- * Stars and figures that fit what was typed: by name, letter and constellation, or HR number. What the calendar goes
- * by already comes first, then figures, then the brighter before the fainter.
+ * Stars and figures that fit what was typed: by name, letter and constellation, or HR number. The chosen one comes
+ * first, then what the calendar goes by already, then figures, then the brighter before the fainter.
  */
 export function findMarkers(
   rows: readonly MarkerRow[],
   typed: string,
   inUse: ReadonlySet<string>,
+  chosen = '',
 ): MarkerRow[] {
   const wanted = typed.trim();
-  return rows
-    .filter((row) => fits(row, wanted))
-    .sort((a, b) => rank(a, inUse) - rank(b, inUse) || a.vMag - b.vMag);
+  const rank = ({ markerKey, kind }: MarkerRow) => {
+    if (markerKey === chosen) return 0;
+    if (inUse.has(markerKey)) return 1;
+    return kind === 'figure' ? 2 : 3;
+  };
+  return rows.filter((row) => fits(row, wanted)).sort((a, b) => rank(a) - rank(b) || a.vMag - b.vMag);
 }
 
 function fits(row: MarkerRow, typed: string): boolean {
@@ -24,9 +28,4 @@ function fits(row: MarkerRow, typed: string): boolean {
   const number = /^(?:hr\s*)?(\d{1,4})$/iu.exec(typed)?.[1];
   if (number !== undefined && row.hr === Number(number)) return true;
   return textFits(`${row.name} ${row.designation}`, typed);
-}
-
-function rank(row: MarkerRow, inUse: ReadonlySet<string>): number {
-  if (inUse.has(row.markerKey)) return 0;
-  return row.kind === 'figure' ? 1 : 2;
 }

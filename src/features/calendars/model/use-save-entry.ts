@@ -1,13 +1,19 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import { entry as entrySchema, entryInput, type EntryInput } from '#shared/contracts/calendars.js';
+import {
+  entry as entrySchema,
+  entryInput,
+  type Entry,
+  type EntryInput,
+} from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useToast } from '#src/ui/toast.js';
 import { useAddEntry, useTakeEntry, useUpdateEntry } from '../api/entry-mutations.js';
+import { draftOf } from './entry-draft.js';
 import { NO_PROBLEMS, problemsFrom, problemsOf, type FieldProblems } from './field-problems.js';
 import type { Editor } from './use-editor.js';
 
@@ -23,8 +29,8 @@ interface Refused {
 
 export interface SaveEntry {
   save: () => Promise<void>;
-  /** Saves a text that was joined from two; `version` is the saved state that it was joined over. */
-  saveJoined: (content: EntryInput, version: number) => Promise<void>;
+  /** Saves a text that was joined from two; `theirs` is the saved state that it was joined over. */
+  saveJoined: (content: EntryInput, theirs: Entry) => Promise<void>;
   isSaving: boolean;
   problems: FieldProblems;
   overall: string | null;
@@ -90,8 +96,12 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       const version = editor.edits.all.get(selected.id)?.baseVersion ?? selected.saved?.version ?? null;
       await send(selected.id, selected.content, version);
     },
-    saveJoined: async (content, version) => {
-      if (selected !== null) await send(selected.id, content, version);
+    saveJoined: async (content, theirs) => {
+      const base = theirs.content;
+      const baseVersion = theirs.version;
+      // From here on this is what I wrote, over their state: also if it cannot be saved just now.
+      edits.put(theirs.id, { draft: draftOf(content), base, baseVersion, keptAt: new Date().toISOString() });
+      await send(theirs.id, content, baseVersion);
     },
     isSaving: add.isPending || update.isPending,
     problems:

@@ -46,6 +46,16 @@ function PublishQuestion({ calendarId, number, onClose }: PublishProps & { onClo
   const { data: calendar } = useQuery(calendarQuery(calendarId));
   const publish = usePublish(calendarId, number);
   const replaced = calendar?.published ?? null;
+  // The button that opened this question may be gone when the answer comes; what follows must happen all the same.
+  const answer = async () => {
+    try {
+      const { label } = await publish.mutateAsync();
+      say(t('publish.done', { label: label ?? '' }));
+      onClose();
+    } catch {
+      // Said above the button.
+    }
+  };
   return (
     <div className="grid gap-3">
       <p>{t('publish.lead')}</p>
@@ -59,19 +69,7 @@ function PublishQuestion({ calendarId, number, onClose }: PublishProps & { onClo
           <p>{words.problem(publish.error)}</p>
         </Care>
       )}
-      <Button
-        look="main"
-        full
-        busy={publish.isPending}
-        onClick={() => {
-          publish.mutate(undefined, {
-            onSuccess: ({ label }) => {
-              say(t('publish.done', { label: label ?? '' }));
-              onClose();
-            },
-          });
-        }}
-      >
+      <Button look="main" full busy={publish.isPending} onClick={() => void answer()}>
         {t('publish.go')}
       </Button>
     </div>

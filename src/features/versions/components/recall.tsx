@@ -47,6 +47,16 @@ function RecallQuestion({ calendarId, number, label, onClose }: RecallProps & { 
   const recall = useRecall(calendarId, number);
   const [note, setNote] = useState('');
   const [refused, setRefused] = useState<string | undefined>(undefined);
+  // The button that opened this question may be gone when the answer comes; what follows must happen all the same.
+  const answer = async (reason: string) => {
+    try {
+      await recall.mutateAsync(reason);
+      say(t('recall.done', { label }));
+      onClose();
+    } catch {
+      // Said above the button.
+    }
+  };
   return (
     <form
       noValidate
@@ -56,12 +66,7 @@ function RecallQuestion({ calendarId, number, label, onClose }: RecallProps & { 
         const parsed = versionsEndpoints.recall.body.shape.note.safeParse(note);
         setRefused(parsed.success ? undefined : words.field(parsed.error.issues[0]?.message ?? 'unknown'));
         if (!parsed.success) return;
-        recall.mutate(parsed.data, {
-          onSuccess: () => {
-            say(t('recall.done', { label }));
-            onClose();
-          },
-        });
+        void answer(parsed.data);
       }}
     >
       <p>{t('recall.lead')}</p>

@@ -57,21 +57,23 @@ function TakeBackQuestion({
   const askChanges = useAskChanges(calendarId, number);
   const [reason, setReason] = useState<(typeof REASONS)[number]>('taken-back');
   const [note, setNote] = useState('');
+  // The button that opened this question may be gone when the answer comes; what follows must happen all the same.
+  const submit = async () => {
+    try {
+      await askChanges.mutateAsync({ reason, note });
+    } catch {
+      return; // Said above the button.
+    }
+    say(t('takeBack.done', { number }));
+    onClose();
+    onDone?.();
+  };
   return (
     <form
       className="grid gap-4"
       onSubmit={(event) => {
         event.preventDefault();
-        askChanges.mutate(
-          { reason, note },
-          {
-            onSuccess: () => {
-              say(t('takeBack.done', { number }));
-              onClose();
-              onDone?.();
-            },
-          },
-        );
+        void submit();
       }}
     >
       <p>{t('takeBack.lead', { number })}</p>
