@@ -57,7 +57,7 @@ export function dateWords(t: TFunction, language: string): DateWords {
   const locale = intlLocale(language);
   const format = (date: PlainDate, options: Intl.DateTimeFormatOptions) =>
     holdTogether(
-      new Intl.DateTimeFormat(locale, {
+      formatOf(locale, {
         ...options,
         ...(options.year !== undefined && date.year < 1 ? { era: 'short' } : {}),
         timeZone: 'UTC',
@@ -140,6 +140,16 @@ function parts(day: AnyDay): PlainDate {
   const date = readDate(day);
   if (date === null) throw new TypeError(`Not a date: ${day}`);
   return date;
+}
+
+const formats = new Map<string, Intl.DateTimeFormat>();
+
+/** Making a format costs some two hundred times as much as using one, and a table of stars holds a thousand dates. */
+function formatOf(locale: string, options: Intl.DateTimeFormatOptions): Intl.DateTimeFormat {
+  const key = `${locale} ${JSON.stringify(options)}`;
+  const format = formats.get(key) ?? new Intl.DateTimeFormat(locale, options);
+  formats.set(key, format);
+  return format;
 }
 
 /** No-break spaces inside a date, an ordinary one after a weekday. */

@@ -16,6 +16,7 @@ export const texts = {
   under: 'Watching place of {{village}}',
   save: 'Save the place',
   nothingChanged: 'nothing has changed',
+  nothingChangedNote: 'Nothing has changed yet.',
   saved: '{{name}} is saved. Its dates are computed anew.',
   created: '{{name}} is there. Its dates are ready under Stars.',
   readOnly: 'Officers of the village can change this place.',
@@ -76,6 +77,7 @@ export const texts = {
     finding: 'Looking up the clock for these coordinates.',
     notFound: 'No clock is known for these coordinates. Choose one.',
     notReached: 'The clock could not be looked up. Choose one, or try again.',
+    required: 'Choose the clock that people keep here.',
     allYear: '{{offset}} all year',
     twoOffsets: '{{january}} in January, {{july}} in July',
     found: 'Found from the coordinates',
@@ -208,7 +210,7 @@ export const texts = {
     more_one: 'Show {{count}} more',
     more_other: 'Show {{count}} more',
     fewer: 'Show fewer',
-    rest: 'Hazy months make the range wider. Each date can come some days earlier or later; the star’s own page says how many.',
+    rest: 'Under each date stands its range. The dates count your skyline, the air of each month and the eye-and-air rule.',
     notReached: 'The dates could not be computed.',
   },
 
@@ -235,7 +237,8 @@ export const texts = {
         source: 'Vogt 1920, p. 37 for the first class; fainter classes fitted to Ideler’s values',
       },
     },
-    shifts: 'Your own shifts',
+    shifts: 'Shifts',
+    shiftsNone: 'none: the rule as it stands',
     shiftsLine: 'Same side {{same}}, opposite side {{opposite}}',
     shiftsHint:
       'Plus: here the Sun must be deeper than the rule says, so stars come back later and go earlier. Minus: the opposite. Leave both at 0 until several seasons of watching say otherwise.',
@@ -246,6 +249,7 @@ export const texts = {
     shift: '{{degrees}}°',
     noShift: 'no shift',
     hills: 'How hills count',
+    hillsShort: 'Hills',
     skylineRule: {
       'altitude-difference': {
         name: 'A star above a hill needs less dark',

@@ -2,8 +2,8 @@
 export const texts = {
   title: 'Stars',
   under: '{{place}}, {{year}}',
-  search: 'Find a star',
-  searchHint: 'Name, letter, constellation or HR number',
+  search: 'Find a star by name, letter, constellation or HR number',
+  searchHint: 'Name, letter or HR number',
   searchClear: 'Clear the search',
   showWhich: 'Which stars',
   good: 'Good markers here',
@@ -18,7 +18,7 @@ export const texts = {
   csvLabel: 'This table as a CSV file',
   does: {
     label: 'What they do here',
-    any: 'Anything',
+    any: 'Whatever they do',
     dated: 'Have a date this year',
     'never-hidden': 'Never hidden',
     'never-sets': 'Never set',

@@ -3,7 +3,7 @@ import { CLARITIES, type Clarity } from '#shared/sky/vocabulary.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { ClarityIcon } from '#src/ui/icons/clarity-icon.js';
 
-/** The air of twelve months by shape and word. With `onChange` each month steps on when pressed. */
+/** The air of twelve months by shape, with a legend. With `onChange` each month steps on when pressed. */
 export function ClarityMonths({
   clarityByMonth,
   onChange,
@@ -14,44 +14,76 @@ export function ClarityMonths({
   const { t } = useTranslation(['places', 'sky']);
   const words = useDateWords();
   return (
-    <ul className="grid grid-cols-[repeat(auto-fill,minmax(5.25rem,1fr))] gap-2">
-      {words.months(2027).map((month, index) => {
-        const clarity = clarityByMonth[index] ?? 'ordinary';
-        const content = (
-          <>
-            <ClarityIcon clarity={clarity} size={26} />
-            <span aria-hidden>
-              {month.short}
-              <span className="block text-small leading-tight text-umber-soft">
-                {t(`sky:clarity.${clarity}`)}
-              </span>
-            </span>
-          </>
-        );
-        const label = t('clarity.month', { month: month.long, clarity: t(`sky:clarity.${clarity}`) });
-        const look = 'flex w-full flex-col items-center gap-1 p-2 text-center leading-tight';
-        return (
-          <li key={month.dayNumber}>
-            {onChange === undefined ? (
-              <span className={look} role="img" aria-label={label}>
-                {content}
-              </span>
-            ) : (
-              <button
-                type="button"
-                className={`${look} min-h-(--target) rounded-board border-(length:--line-control) border-edge bg-chalk`}
-                aria-label={label}
-                onClick={() => {
-                  onChange(clarityByMonth.map((each, at) => (at === index ? nextClarity(each) : each)));
-                }}
-              >
-                {content}
-              </button>
-            )}
+    <>
+      <ul className="grid grid-cols-4 gap-1 mid:grid-cols-6">
+        {words.months(ANY_YEAR).map((month, index) => {
+          const clarity = clarityByMonth[index] ?? 'ordinary';
+          return (
+            <li key={month.dayNumber}>
+              <Month
+                short={month.short}
+                clarity={clarity}
+                label={t('clarity.month', { month: month.long, clarity: t(`sky:clarity.${clarity}`) })}
+                onPress={
+                  onChange &&
+                  (() => {
+                    onChange(clarityByMonth.map((each, at) => (at === index ? nextClarity(each) : each)));
+                  })
+                }
+              />
+            </li>
+          );
+        })}
+      </ul>
+      <ul className="mt-2 flex flex-wrap gap-x-5 gap-y-1 text-small">
+        {CLARITIES.map((clarity) => (
+          <li key={clarity} className="flex items-center gap-2">
+            <ClarityIcon clarity={clarity} size={20} />
+            {t(`sky:clarity.${clarity}`)}
           </li>
-        );
-      })}
-    </ul>
+        ))}
+      </ul>
+    </>
+  );
+}
+
+/** Names of the months are those of any year. */
+const ANY_YEAR = 2027;
+
+function Month({
+  short,
+  clarity,
+  label,
+  onPress,
+}: {
+  short: string;
+  clarity: Clarity;
+  label: string;
+  onPress: (() => void) | undefined;
+}) {
+  const look = 'flex w-full flex-col items-center gap-1 p-1.5 text-center text-small leading-tight';
+  const content = (
+    <>
+      <ClarityIcon clarity={clarity} size={26} />
+      <span aria-hidden>{short}</span>
+    </>
+  );
+  if (onPress === undefined) {
+    return (
+      <span className={look} role="img" aria-label={label}>
+        {content}
+      </span>
+    );
+  }
+  return (
+    <button
+      type="button"
+      className={`${look} min-h-14 rounded-board border-(length:--line-control) border-edge`}
+      aria-label={label}
+      onClick={onPress}
+    >
+      {content}
+    </button>
   );
 }
 

@@ -14,7 +14,7 @@ import { skylineEffectsQuery, skylinePreviewQuery } from '../api/places-queries.
 import { EffectCards, EffectTable } from './effect-rows.js';
 
 const PAUSE_MS = 500;
-const FIRST_ROWS = 8;
+const FIRST_ROWS = { table: 8, cards: 4 };
 
 export interface EffectsSectionProps {
   communityId: string;
@@ -49,7 +49,8 @@ export function EffectsSection({ communityId, placeId, preview, hasSkyline, year
   if (placeId === null && !usesPreview) return null;
 
   const rows = data ?? [];
-  const shown = showsAll ? rows : rows.slice(0, FIRST_ROWS);
+  const firstRows = isMid ? FIRST_ROWS.table : FIRST_ROWS.cards;
+  const shown = showsAll ? rows : rows.slice(0, firstRows);
   return (
     <section aria-labelledby="place-effects">
       <h2 id="place-effects" className="mb-2">
@@ -69,11 +70,11 @@ export function EffectsSection({ communityId, placeId, preview, hasSkyline, year
           <Skeleton lines={6} />
         </Board>
       ) : (
-        <div aria-busy={isLate} className={isLate ? 'opacity-60' : undefined}>
+        <div aria-busy={isLate} className={isLate ? 'opacity-85' : undefined}>
           <Rows rows={shown} asTable={isMid} />
         </div>
       )}
-      {rows.length > FIRST_ROWS && (
+      {rows.length > firstRows && (
         <Button
           look="quiet"
           className="-ms-2"
@@ -82,7 +83,7 @@ export function EffectsSection({ communityId, placeId, preview, hasSkyline, year
             setShowsAll(!showsAll);
           }}
         >
-          {showsAll ? t('effects.fewer') : t('effects.more', { count: rows.length - FIRST_ROWS })}
+          {showsAll ? t('effects.fewer') : t('effects.more', { count: rows.length - firstRows })}
         </Button>
       )}
       <p className="mt-2 text-small text-umber-soft" aria-live="polite">

@@ -1,5 +1,5 @@
 import { Check } from 'lucide-react';
-import { useCallback, useRef, useState } from 'react';
+import { useCallback, useMemo, useRef, useState } from 'react';
 import { flushSync } from 'react-dom';
 import { useTranslation } from 'react-i18next';
 import { place as placeSchema, type Place } from '#shared/contracts/places.js';
@@ -57,7 +57,9 @@ export function PlaceEditor(props: PlaceEditorProps) {
   const [left, setLeft] = useState<ReadonlySet<PlaceField>>(new Set());
   const [refused, setRefused] = useState<PlaceProblems>({});
   const [overall, setOverall] = useState<string | null>(null);
-  const reading = readDraft(draft);
+  const reading = useMemo(() => readDraft(draft), [draft]);
+  // The same object as long as the draft stands still: it is what a computation is asked for.
+  const preview = useMemo(() => previewOf(draft), [draft]);
   const { year } = todayIn(draft.timeZone === '' ? null : knownZone(draft.timeZone));
 
   const { change: changeDraft } = state;
@@ -127,7 +129,7 @@ export function PlaceEditor(props: PlaceEditorProps) {
       <EffectsSection
         communityId={communityId}
         placeId={place?.id ?? null}
-        preview={state.changed ? previewOf(draft) : null}
+        preview={state.changed ? preview : null}
         hasSkyline={draft.skyline.length > 0 || draft.skylineText !== null}
         year={year}
       />
@@ -143,9 +145,11 @@ export function PlaceEditor(props: PlaceEditorProps) {
       >
         <ThumbBar
           note={
-            state.keptAt === null || !state.changed
-              ? undefined
-              : t('common:keptDraft', { when: dates.moment(state.keptAt) })
+            isClosed
+              ? t('nothingChangedNote')
+              : state.keptAt === null
+                ? undefined
+                : t('common:keptDraft', { when: dates.moment(state.keptAt) })
           }
         >
           <Button
@@ -205,25 +209,28 @@ export function PlaceEditor(props: PlaceEditorProps) {
         )}
         {place === null ? (
           <>
-            {boards.where}
-            {boards.skyline}
-            <Columns>
+            <Columns wider="first">
+              {boards.where}
               {boards.clarity}
+            </Columns>
+            {boards.skyline}
+            <Columns wider="first">
+              {boards.effects}
               {boards.rule}
             </Columns>
-            {boards.effects}
           </>
         ) : (
           <>
             {boards.skyline}
-            <Columns wider="first">
+            {/* In one column the rule comes last; on a wide screen it fills the room under the dates. */}
+            <div className="grid gap-4 wide:grid-cols-[minmax(0,7fr)_minmax(0,5fr)] wide:grid-rows-[auto_1fr] wide:items-start wide:gap-x-6">
               {boards.effects}
-              <div className="grid gap-4">
+              <div className="grid gap-4 wide:row-span-2">
                 {boards.where}
                 {boards.clarity}
               </div>
-            </Columns>
-            {boards.rule}
+              {boards.rule}
+            </div>
             <p className="text-small text-umber-soft">{t('publishedStay')}</p>
           </>
         )}

@@ -5,6 +5,7 @@ import { writeCoordinate } from '../model/coordinate.js';
 import { signedDegreesText } from '../model/degrees.js';
 import type { PlaceField } from '../model/place-draft.js';
 import { heightScale, turnView } from '../model/skyline-edit.js';
+import { withoutFullTurn } from '../model/skyline-text.js';
 import { zoneName } from '../model/time-zone.js';
 import { ClarityMonths } from './clarity-months.js';
 import { useSkylineWords } from './skyline-words.js';
@@ -43,19 +44,18 @@ export function PlaceFieldValue({ field, place }: { field: PlaceField; place: Pl
 function SmallSkyline({ place }: { place: PlaceInput }) {
   const { t } = useTranslation('places');
   const words = useSkylineWords();
-  const { topDeg, bottomDeg } = heightScale(place.skyline);
+  const points = withoutFullTurn(place.skyline);
+  const { topDeg, bottomDeg } = heightScale(points);
   return (
     <>
       <SkylinePicture
-        points={place.skyline}
+        points={points}
         view={{ ...turnView(null), topDeg, bottomDeg }}
         height={56}
-        label={words.sentence(place.skyline, place.name)}
+        label={words.sentence(points, place.name)}
       />
       <span className="text-small">
-        {place.skyline.length === 0
-          ? t('stale.level')
-          : t('stale.skylinePoints', { count: place.skyline.length })}
+        {points.length === 0 ? t('stale.level') : t('stale.skylinePoints', { count: points.length })}
       </span>
     </>
   );

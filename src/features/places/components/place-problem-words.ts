@@ -41,6 +41,8 @@ export function usePlaceProblemWords(): PlaceProblemWords {
           return problem.value === ''
             ? t('elevationMissing')
             : t('elevationNotANumber', { value: problem.value });
+        case 'no-clock':
+          return t('zone.required');
         case 'skyline-lines':
           return t('skyline.nothingSaved');
         case 'code':

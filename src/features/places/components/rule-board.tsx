@@ -40,10 +40,14 @@ export function RuleBoard({ draft, change }: FieldPart) {
       <div className="mt-4">
         <Fold
           title={t('rule.shifts')}
-          line={t('rule.shiftsLine', {
-            same: degrees(draft.sameSideShiftDeg),
-            opposite: degrees(draft.oppositeSideShiftDeg),
-          })}
+          line={
+            draft.sameSideShiftDeg === 0 && draft.oppositeSideShiftDeg === 0
+              ? t('rule.shiftsNone')
+              : t('rule.shiftsLine', {
+                  same: degrees(draft.sameSideShiftDeg),
+                  opposite: degrees(draft.oppositeSideShiftDeg),
+                })
+          }
         >
           <p className="mb-3 text-small text-umber-soft">{t('rule.shiftsHint')}</p>
           <div className="grid gap-4 mid:grid-cols-2">
@@ -75,7 +79,7 @@ export function RuleBoard({ draft, change }: FieldPart) {
             />
           </div>
         </Fold>
-        <Fold title={t('rule.hills')} line={t(`rule.skylineRule.${draft.skylineRule}.name`)}>
+        <Fold title={t('rule.hillsShort')} line={t(`rule.skylineRule.${draft.skylineRule}.name`)}>
           <PickGroup
             label={t('rule.hills')}
             labelForEars

@@ -5,6 +5,7 @@ import type { SkylinePoint } from '#shared/contracts/places.js';
 import { listWords } from '#src/lib/list-words.js';
 import { FROM_MID, useMediaQuery } from '#src/lib/media-query.js';
 import { Button } from '#src/ui/button.js';
+import { classNames } from '#src/ui/class-names.js';
 import { More } from '#src/ui/fold.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -81,7 +82,12 @@ export function SkylineBoard(part: FieldPart) {
   }
   return (
     <Board title={t('skyline.title')}>
-      <div className="grid gap-4 wide:grid-cols-[minmax(0,1fr)_15rem] wide:gap-6">
+      <div
+        className={classNames(
+          'grid gap-4 wide:gap-6',
+          usesRings ? 'wide:grid-cols-[minmax(0,1fr)_15rem]' : 'wide:grid-cols-[minmax(0,1fr)_27rem]',
+        )}
+      >
         <div className="min-w-0">
           {half !== null && (
             <PickGroup

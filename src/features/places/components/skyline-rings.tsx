@@ -26,6 +26,7 @@ const LEAST_PITCH = 13;
 const TARGET = 48;
 
 interface PlacedRing {
+  key: string;
   index: number;
   point: SkylinePoint;
   x: number;
@@ -34,7 +35,9 @@ interface PlacedRing {
 
 function placed({ points, half, scale }: Omit<RingsProps, 'selected'>): PlacedRing[] {
   return points.flatMap((point, index) =>
-    placesInView(point.azimuthDeg, turnView(half)).map((at) => ({
+    placesInView(point.azimuthDeg, turnView(half)).map((at, copy) => ({
+      // A ring keeps its key while it moves; north has two.
+      key: `${index} ${copy}`,
       index,
       point,
       x: scale.x(at),
@@ -53,12 +56,12 @@ export function DrawnRings(props: RingsProps) {
   const isCrowded = pitchOf(rings, props.scale) < LEAST_PITCH;
   return (
     <>
-      {rings.map(({ index, x, y }) =>
+      {rings.map(({ key, index, x, y }) =>
         index === props.selected ? (
-          <Peg key={`peg ${x}`} x={String(x)} footY={y} size={1.1} />
+          <Peg key={key} x={String(x)} footY={y} size={1.1} />
         ) : isCrowded ? null : (
           <circle
-            key={`${index} ${x}`}
+            key={key}
             cx={x}
             cy={y}
             r={RING}
@@ -126,9 +129,9 @@ export function RingKeys(props: RingKeysProps) {
     if (to !== null) onDrag?.(index, to, isEnd);
   };
 
-  return rings.map(({ index, point, x, y }) => (
+  return rings.map(({ key, index, point, x, y }) => (
     <button
-      key={`${index} ${x}`}
+      key={key}
       ref={(element) => {
         if (element) keys.current.set(index, element);
         else keys.current.delete(index);

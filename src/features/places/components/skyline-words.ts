@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import type { SkylinePoint } from '#shared/contracts/places.js';
+import { compassPoint } from '#src/lib/sky-words.js';
 import { degreesText } from '../model/degrees.js';
 import { directionWords, handsHigh } from '../model/direction-words.js';
 
@@ -38,9 +39,9 @@ export function useSkylineWords(): SkylineWords {
       return t('skyline.picture', {
         place,
         highest: degrees(highest.altitudeDeg),
-        where: direction(highest.azimuthDeg),
+        where: t(`sky:compass.${compassPoint(highest.azimuthDeg)}`),
         lowest: degrees(lowest.altitudeDeg),
-        lowestWhere: direction(lowest.azimuthDeg),
+        lowestWhere: t(`sky:compass.${compassPoint(lowest.azimuthDeg)}`),
       });
     },
   };

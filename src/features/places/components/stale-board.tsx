@@ -32,7 +32,7 @@ export function StaleBoard({ base, theirs, mine, onJoin }: StaleBoardProps) {
             label={t(FIELD_NAMES[field])}
             hint={base === null ? undefined : t(`stale.changedBy.${changedBy}`)}
             stacked
-            className="max-w-measure"
+            className="mid:[&_.picks]:grid-cols-2"
             value={choices[field] ?? null}
             onChange={(side) => {
               setChoices({ ...choices, [field]: side });

@@ -1,17 +1,20 @@
 import { useQuery } from '@tanstack/react-query';
 import { Clock } from 'lucide-react';
-import { useEffect, useMemo, useState } from 'react';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSettled } from '#src/lib/settled.js';
 import { Button } from '#src/ui/button.js';
-import { ComboField } from '#src/ui/combo-field.js';
 import { FieldNotes } from '#src/ui/field.js';
+import { Skeleton } from '#src/ui/waiting.js';
 import { timeZoneQuery } from '../api/places-queries.js';
 import { readCoordinate } from '../model/coordinate.js';
-import { allZones, offsetName, offsetsMin, zoneName } from '../model/time-zone.js';
+import { offsetName, offsetsMin, zoneName } from '../model/time-zone.js';
 import type { FieldPart } from './place-form-parts.js';
 
 const PAUSE_MS = 500;
+
+/** A list to type in is heavy, and hardly anybody needs it: it comes when it is asked for. */
+const ZoneChoice = lazy(() => import('./zone-choice.js'));
 
 /** The clock of the place: found from the coordinates, changed by hand where people keep another one. */
 export function TimeZoneField({ draft, change, problem, year }: FieldPart & { year: number }) {
@@ -75,35 +78,18 @@ export function TimeZoneField({ draft, change, problem, year }: FieldPart & { ye
         )}
       </div>
       {mustChoose && (
-        <ZoneChoice
-          value={draft.timeZone}
-          onChoose={(timeZone) => {
-            change({ timeZone, timeZoneChosen: true });
-            setChoosing(false);
-          }}
-        />
+        <Suspense fallback={<Skeleton lines={2} />}>
+          <ZoneChoice
+            value={draft.timeZone}
+            onChoose={(timeZone) => {
+              change({ timeZone, timeZoneChosen: true });
+              setChoosing(false);
+            }}
+          />
+        </Suspense>
       )}
       <FieldNotes inputId="place-timeZone-notes" problem={said} />
     </div>
-  );
-}
-
-function ZoneChoice({ value, onChoose }: { value: string; onChoose: (timeZone: string) => void }) {
-  const { t } = useTranslation('places');
-  const options = useMemo(
-    () => allZones([value]).map((timeZone) => ({ id: timeZone, text: zoneName(timeZone) })),
-    [value],
-  );
-  return (
-    <ComboField
-      label={t('zone.choose')}
-      hint={t('zone.chooseHint')}
-      options={options}
-      value={value === '' ? null : value}
-      onChange={(timeZone) => {
-        if (timeZone !== null && timeZone !== value) onChoose(timeZone);
-      }}
-    />
   );
 }
 

@@ -63,6 +63,7 @@ export type PlaceField = (typeof PLACE_FIELDS)[number];
 export type PlaceProblem =
   | { kind: 'coordinate'; problem: CoordinateProblem }
   | { kind: 'elevation'; value: string }
+  | { kind: 'no-clock' }
   | { kind: 'skyline-lines'; problems: readonly LineProblem[] }
   | { kind: 'code'; code: string; message?: string };
 export type PlaceProblems = Partial<Record<PlaceField, PlaceProblem>>;
@@ -131,14 +132,16 @@ export function readDraft(draft: PlaceDraft): PlaceReading {
   if (elevationM === null) problems.elevationM = { kind: 'elevation', value: draft.elevation.trim() };
   const table = draft.skylineText === null ? null : readSkylineText(draft.skylineText);
   if (table?.ok === false) problems.skyline = { kind: 'skyline-lines', problems: table.problems };
-  if (draft.timeZone === '') problems.timeZone = { kind: 'code', code: 'required' };
+  // The clock follows from the coordinates: while these are missing, nothing is said about it.
+  const clockIsDue = latitude.ok && longitude.ok;
+  if (draft.timeZone === '' && clockIsDue) problems.timeZone = { kind: 'no-clock' };
 
   const parsed = placeInput.safeParse({
     name: draft.name,
     latitudeDeg: latitude.ok ? latitude.valueDeg : 0,
     longitudeDeg: longitude.ok ? longitude.valueDeg : 0,
     elevationM: elevationM ?? 0,
-    timeZone: draft.timeZone,
+    timeZone: draft.timeZone === '' ? 'UTC' : draft.timeZone,
     skyline: table?.ok === true ? table.points : draft.skyline,
     clarityByMonth: draft.clarityByMonth,
     thresholdSet: draft.thresholdSet,
@@ -152,7 +155,7 @@ export function readDraft(draft: PlaceDraft): PlaceReading {
       if (field !== undefined) problems[field] ??= { kind: 'code', code: issue.message };
     }
   }
-  return parsed.success && Object.keys(problems).length === 0
+  return parsed.success && draft.timeZone !== '' && Object.keys(problems).length === 0
     ? { ok: true, input: parsed.data, problems }
     : { ok: false, problems };
 }

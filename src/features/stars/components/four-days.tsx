@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import type { Place } from '#shared/contracts/places.js';
 import type { MarkerDetail } from '#shared/contracts/stars.js';
-import { Board, Care } from '#src/ui/surfaces.js';
+import { Board } from '#src/ui/surfaces.js';
 import { noDates } from '../model/row-outcome.js';
 import { CARD_ORDER } from '../model/tie.js';
 import { DateCard } from './date-card.js';
@@ -11,11 +11,10 @@ export interface FourDaysProps {
   star: MarkerDetail;
   dates: StarDates;
   place: Place;
-  title: string;
   mayTie: boolean;
 }
 
-/** Four cards, or the one sentence why there are no days; the cautions stand before anybody goes out to look. */
+/** Four cards, or the one sentence why there are no days. */
 export function FourDays(props: FourDaysProps) {
   const { star, dates, place } = props;
   const { t } = useTranslation('stars');
@@ -36,10 +35,6 @@ export function FourDays(props: FourDaysProps) {
               <p>{t('star.neverHidden')}</p>
             </Board>
           )}
-          <Care>
-            <p>{t('star.eyes')}</p>
-            <p className="mt-1">{t('star.nights')}</p>
-          </Care>
           <div className="grid gap-4 mid:grid-cols-2">
             {CARD_ORDER.map((phenomenon) => (
               <DateCard key={phenomenon} {...props} phenomenon={phenomenon} />

@@ -1,12 +1,12 @@
+import { memo } from 'react';
 import { Trans, useTranslation } from 'react-i18next';
-import { Link } from 'react-router-dom';
 import type { MarkerRow } from '#shared/contracts/stars.js';
-import { paths } from '#src/lib/paths.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import { noDates } from '../model/row-outcome.js';
 import { hiddenOf, type StarRow } from '../model/star-rows.js';
 import { StripCell } from './star-cells.js';
+import { StarLink } from './star-link.js';
 import { useStarTableFacts } from './star-table-context.js';
 
 /** Under 700 px: a card is a lane and a sentence. */
@@ -22,8 +22,8 @@ export function StarCards({ stars }: { stars: readonly StarRow[] }) {
   );
 }
 
-function StarCard({ star }: { star: StarRow }) {
-  const { placeId, year, listAddress, dates, firstDayNumber, lastDayNumber } = useStarTableFacts();
+const StarCard = memo(function StarCard({ star }: { star: StarRow }) {
+  const { dates, firstDayNumber, lastDayNumber } = useStarTableFacts();
   return (
     // The heading's link reaches over the whole card: one link to hear, a large one to touch.
     <article className="board relative has-[a:focus-visible]:outline-3 has-[a:focus-visible]:outline-offset-2 has-[a:focus-visible]:outline-indigo">
@@ -31,13 +31,12 @@ function StarCard({ star }: { star: StarRow }) {
         <MarkerIcon markerKey={star.row.markerKey} size={28} />
         <div>
           <h2>
-            <Link
+            <StarLink
               className="text-umber no-underline after:absolute after:inset-0 after:content-[''] focus-visible:outline-none"
-              to={paths.star(star.row.markerKey, { placeId, year })}
-              state={{ list: listAddress }}
+              markerKey={star.row.markerKey}
             >
               {star.title}
-            </Link>
+            </StarLink>
           </h2>
           <p className="text-small text-umber-soft">{star.second}</p>
         </div>
@@ -49,7 +48,7 @@ function StarCard({ star }: { star: StarRow }) {
       </p>
     </article>
   );
-}
+});
 
 /** The one thing to know of a star: when it comes back, or why there is no such day. */
 function StarSentence({ row }: { row: MarkerRow }) {

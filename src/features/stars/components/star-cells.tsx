@@ -1,28 +1,25 @@
 import { useTranslation } from 'react-i18next';
-import { Link } from 'react-router-dom';
 import type { MarkerRow } from '#shared/contracts/stars.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
-import { paths } from '#src/lib/paths.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { YearLane } from '#src/ui/pictures/year-lane.js';
 import { brightnessWord, magnitudeText } from '../model/row-outcome.js';
 import type { StarRow } from '../model/star-rows.js';
+import { StarLink } from './star-link.js';
 import { useStarTableFacts } from './star-table-context.js';
 import { useStripSentence } from './strip-words.js';
 
 export function StarName({ star }: { star: StarRow }) {
-  const { placeId, year, listAddress } = useStarTableFacts();
   return (
     <span className="flex items-center gap-2 wide:gap-3">
       <MarkerIcon markerKey={star.row.markerKey} size={26} />
       <span className="min-w-0">
-        <Link
+        <StarLink
           className="inline-flex min-h-8 items-center text-umber decoration-edge"
-          to={paths.star(star.row.markerKey, { placeId, year })}
-          state={{ list: listAddress }}
+          markerKey={star.row.markerKey}
         >
           {star.title}
-        </Link>
+        </StarLink>
         <span className="range-line">{star.second}</span>
       </span>
     </span>

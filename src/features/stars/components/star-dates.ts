@@ -36,7 +36,8 @@ export function useStarDates(year: number, firstDayNumber: number): StarDates {
   const words = useDateWords();
   return useMemo(() => {
     const date = (day: CivilDay) => civilDate(day, year);
-    const within = (dayNumber: number) => dateWithin(dayNumber, year, firstDayNumber);
+    const starts = monthStarts(year, firstDayNumber);
+    const within = (dayNumber: number) => dateWithin(dayNumber, year, starts);
     // Names of the months are those of any year.
     const names = words.months(2027);
     return {
@@ -60,7 +61,7 @@ export function useStarDates(year: number, firstDayNumber: number): StarDates {
       aboutBetween: ({ expected, early, late }) =>
         words.aboutBetween(date(expected), early && date(early), late && date(late)),
       year: words.year(year),
-      months: monthStarts(year, firstDayNumber).map((month, index) => ({
+      months: starts.map((month, index) => ({
         ...month,
         short: names[index]?.short ?? '',
         narrow: names[index]?.narrow ?? '',

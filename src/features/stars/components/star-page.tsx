@@ -12,8 +12,8 @@ import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useSettled } from '#src/lib/settled.js';
 import { ButtonLink } from '#src/ui/button.js';
-import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
-import { Board } from '#src/ui/surfaces.js';
+import { Mast, Page, ThumbBar } from '#src/ui/page.js';
+import { Board, Care } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { starQuery } from '../api/stars-queries.js';
 import { isJulian, readYear } from '../model/civil-year.js';
@@ -93,7 +93,7 @@ function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) 
       place={place}
       list={list}
       isLate={isPlaceholderData || settledYear !== year}
-      yearStepper={<YearStepper className="w-44" year={year} onChange={changeYear} />}
+      yearStepper={<YearStepper className="w-44" labelForEars year={year} onChange={changeYear} />}
     />
   );
 }
@@ -132,13 +132,20 @@ function StarScreen({ star, place, list, isLate, yearStepper }: StarScreenProps)
           </ThumbBar>
         )}
       </Mast>
-      <div aria-busy={isLate} className={isLate ? 'opacity-60' : undefined}>
+      <div aria-busy={isLate} className={isLate ? 'opacity-85' : undefined}>
         <YearBoard star={star} title={naming.title} dates={dates} place={place} yearStepper={yearStepper} />
         {isJulian(star.year) && <p className="mt-3 text-small">{t('julian')}</p>}
-        <Columns wider="first" className="mt-4">
-          <FourDays star={star} dates={dates} place={place} title={naming.title} mayTie={mayTie} />
+        {/* A phone reads cautions before the days; a wide screen has them beside. */}
+        <div className="mt-4 grid gap-4 wide:grid-cols-[minmax(0,7fr)_minmax(0,5fr)] wide:grid-rows-[auto_1fr] wide:items-start wide:gap-6">
+          <Care className="wide:col-start-2">
+            <p>{t('star.eyes')}</p>
+            <p className="mt-1">{t('star.nights')}</p>
+          </Care>
+          <div className="wide:col-start-1 wide:row-span-2 wide:row-start-1">
+            <FourDays star={star} dates={dates} place={place} mayTie={mayTie} />
+          </div>
           <BasisBoard star={star} dates={dates} placeId={place.id} />
-        </Columns>
+        </div>
       </div>
     </Page>
   );

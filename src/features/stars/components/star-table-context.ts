@@ -9,8 +9,6 @@ export interface StarTableFacts {
   placeId: string;
   latitudeDeg: number;
   dates: StarDates;
-  /** The list's address, so that a star leads back to it as it was. */
-  listAddress: string;
 }
 
 export const StarTableContext = createContext<StarTableFacts | null>(null);

@@ -1,4 +1,5 @@
 import { type ReactTable } from '@tanstack/react-table';
+import { memo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import { ariaSort, SortKey, Table } from '#src/ui/table.js';
@@ -25,17 +26,17 @@ export function StarTable({ table, rows, caption, onSort }: StarTableProps) {
     <Table
       caption={caption}
       middle
-      className="table-fixed [&_td]:px-1.5 [&_th]:px-1.5 wide:[&_td]:px-3 wide:[&_th]:px-3"
+      className="table-fixed [&_td]:px-1.5 [&_th]:px-1.5 wide:[&_td]:px-2 wide:[&_th]:px-2"
     >
       <colgroup>
-        <col className="w-[18%]" />
-        <col className="w-[16%] wide:w-[20%]" />
-        <col className="w-[13%] wide:w-[12%]" />
-        <col className="w-[9%] wide:w-[8%]" />
-        <col className="w-[13%] wide:w-[12%]" />
-        <col className="w-[12%] wide:w-[11%]" />
-        <col className="w-[12%] wide:w-[11%]" />
-        <col className="w-[10%] wide:w-[9%]" />
+        <col className="w-[17%]" />
+        <col className="w-[12.5%] wide:w-[19%]" />
+        <col className="w-[12.25%] wide:w-[12%]" />
+        <col className="w-[9%] wide:w-[7.5%]" />
+        <col className="w-[12.25%] wide:w-[12%]" />
+        <col className="w-[12.25%] wide:w-[12%]" />
+        <col className="w-[12.25%] wide:w-[12%]" />
+        <col className="w-[12.5%] wide:w-[8.5%]" />
       </colgroup>
       <thead>
         <tr>
@@ -99,12 +100,17 @@ function StripHead() {
   return (
     <th scope="col">
       {t('column.strip')}
-      <MonthScale span={{ first: firstDayNumber, last: lastDayNumber }} months={dates.months} />
+      <span className="hidden wide:block">
+        <MonthScale span={{ first: firstDayNumber, last: lastDayNumber }} months={dates.months} />
+      </span>
     </th>
   );
 }
 
-function StarTableRow({ table, row }: { table: StarsTable; row: TableRow }) {
+/** A row depends on its star alone: sorting and searching move rows, they do not draw them anew. */
+const StarTableRow = memo(DrawnRow, (before, after) => before.row.original === after.row.original);
+
+function DrawnRow({ table, row }: { table: StarsTable; row: TableRow }) {
   const { t } = useTranslation('stars');
   const { latitudeDeg, dates } = useStarTableFacts();
   const why = noDates(row.original.row, latitudeDeg);

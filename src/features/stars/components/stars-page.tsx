@@ -2,10 +2,11 @@ import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import { useTable } from '@tanstack/react-table';
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
-import { useLocation, useSearchParams } from 'react-router-dom';
+import { useSearchParams } from 'react-router-dom';
 import type { Place } from '#shared/contracts/places.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
 import { useCurrentPlace } from '#src/lib/community.js';
+import { useDateWords } from '#src/lib/date-words.js';
 import { todayIn } from '#src/lib/days.js';
 import { FROM_MID, useMediaQuery } from '#src/lib/media-query.js';
 import { usePageTitle } from '#src/lib/page-title.js';
@@ -26,7 +27,7 @@ import { starColumns, starFeatures } from './star-columns.js';
 import { useStarNaming } from './star-names.js';
 import { StarTableContext, type StarTableFacts } from './star-table-context.js';
 import { StarTable } from './star-table.js';
-import { StarsToolbar } from './stars-toolbar.js';
+import { PlaceSelect, StarsToolbar } from './stars-toolbar.js';
 import { useStarList } from './use-star-list.js';
 
 /** The stars of the place on screen. */
@@ -60,6 +61,7 @@ const NO_ROWS: readonly MarkerRow[] = [];
 function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
   const { t } = useTranslation('stars');
   const words = useProblemWords();
+  const dateWords = useDateWords();
   const [, setSearch] = useSearchParams();
   const thisYear = todayIn(place.timeZone).year;
   const { query, settledYear, set } = useStarList(thisYear);
@@ -90,12 +92,21 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
   const facts = useFacts(place, data);
   const isLate = isPlaceholderData || query.year !== settledYear;
 
+  const choosePlace = (placeId: string) => {
+    setSearch((before) => {
+      before.delete('placeId');
+      return before;
+    });
+    onPlace(placeId);
+  };
   const sort = (column: SortKey) => {
     set({ sort: column, descending: query.sort === column && !query.descending });
   };
   return (
     <Page>
-      <Mast title={t('title')} under={t('under', { place: place.name, year: facts.dates.year })} />
+      <Mast title={t('title')} under={t('under', { place: place.name, year: dateWords.year(query.year) })}>
+        {isMid && <PlaceSelect place={place} places={places} onPlace={choosePlace} forEars />}
+      </Mast>
       <StarsToolbar
         query={query}
         set={set}
@@ -103,13 +114,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
         places={places}
         counts={counts}
         hasHeads={isMid}
-        onPlace={(placeId) => {
-          setSearch((before) => {
-            before.delete('placeId');
-            return before;
-          });
-          onPlace(placeId);
-        }}
+        onPlace={choosePlace}
       />
       {isJulian(query.year) && <p className="mb-3 text-small">{t('julian')}</p>}
       {data === undefined ? (
@@ -145,7 +150,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
         </Board>
       ) : (
         <StarTableContext value={facts}>
-          <div aria-busy={isLate} className={isLate ? 'opacity-60' : undefined}>
+          <div aria-busy={isLate} className={isLate ? 'opacity-85' : undefined}>
             {isMid ? (
               <StarTable
                 table={table}
@@ -199,7 +204,6 @@ function useFacts(
   place: Place,
   data: { year: number; firstDayNumber: number; lastDayNumber: number } | undefined,
 ): StarTableFacts {
-  const { pathname, search } = useLocation();
   const year = data?.year ?? todayIn(place.timeZone).year;
   const firstDayNumber = data?.firstDayNumber ?? 0;
   const lastDayNumber = data?.lastDayNumber ?? 0;
@@ -212,8 +216,7 @@ function useFacts(
       placeId: place.id,
       latitudeDeg: place.latitudeDeg,
       dates,
-      listAddress: pathname + search,
     }),
-    [year, firstDayNumber, lastDayNumber, place, dates, pathname, search],
+    [year, firstDayNumber, lastDayNumber, place, dates],
   );
 }

@@ -23,7 +23,7 @@ export interface StarsToolbarProps {
   hasHeads: boolean;
 }
 
-/** Find, choose, step through the years, take along as CSV. */
+/** Find, choose, step through the years, take along as CSV. Cards have a fold for what table heads do. */
 export function StarsToolbar(props: StarsToolbarProps) {
   const { query, set, place, counts, hasHeads } = props;
   const { t } = useTranslation('stars');
@@ -41,36 +41,13 @@ export function StarsToolbar(props: StarsToolbarProps) {
     </ButtonAnchor>
   );
   return (
-    <div className="mb-4 grid gap-4">
-      <div className="flex flex-wrap items-end gap-x-3 gap-y-4">
-        <TextField
-          className="min-w-0 flex-[1_1_18rem]"
-          label={t('search')}
-          placeholder={t('searchHint')}
-          type="search"
-          enterKeyHint="search"
-          autoComplete="off"
-          leadIcon={<Search aria-hidden size={22} />}
+    <div className="mb-4 grid gap-3">
+      <div className="flex flex-wrap items-end gap-3">
+        <StarSearch
           value={query.search}
-          onChange={(event) => {
-            choose({ search: event.currentTarget.value });
+          onChange={(search) => {
+            choose({ search });
           }}
-          {...(query.search === ''
-            ? {}
-            : {
-                endKey: (
-                  <button
-                    type="button"
-                    className="inp-key"
-                    aria-label={t('searchClear')}
-                    onClick={() => {
-                      choose({ search: '' });
-                    }}
-                  >
-                    <X aria-hidden size={22} />
-                  </button>
-                ),
-              })}
         />
         <PickGroup
           label={t('showWhich')}
@@ -82,27 +59,70 @@ export function StarsToolbar(props: StarsToolbarProps) {
           options={[
             {
               value: 'good',
-              label: counts === null ? t('good') : t('goodCount', { count: counts.good }),
+              label: counts === null || !hasHeads ? t('good') : t('goodCount', { count: counts.good }),
             },
             { value: 'all', label: counts === null ? t('allStars') : t('all', { count: counts.all }) },
           ]}
         />
+        {hasHeads && <DoesSelect query={query} choose={choose} forEars />}
         <YearStepper
           className="w-44"
           year={query.year}
+          labelForEars
           onChange={(year) => {
             set({ year });
           }}
         />
         {hasHeads && csv}
       </div>
-      <Fold title={t('orderAndChoice')} line={<ChoiceLine {...props} />}>
-        <div className="grid gap-4 mid:grid-cols-3">
-          <Selects {...props} choose={choose} />
-        </div>
-        {!hasHeads && <div className="mt-4">{csv}</div>}
-      </Fold>
+      {!hasHeads && (
+        <Fold title={t('orderAndChoice')} line={<ChoiceLine {...props} />}>
+          <div className="grid gap-4">
+            <OrderSelect query={query} choose={choose} />
+            <DoesSelect query={query} choose={choose} />
+            <PlaceSelect {...props} />
+            <div>{csv}</div>
+          </div>
+        </Fold>
+      )}
     </div>
+  );
+}
+
+function StarSearch({ value, onChange }: { value: string; onChange: (search: string) => void }) {
+  const { t } = useTranslation('stars');
+  const clear = {
+    endKey: (
+      <button
+        type="button"
+        className="inp-key"
+        aria-label={t('searchClear')}
+        onClick={() => {
+          onChange('');
+        }}
+      >
+        <X aria-hidden size={22} />
+      </button>
+    ),
+  };
+  return (
+    <TextField
+      className="min-w-0 flex-[1_1_15rem]"
+      label={<span className="for-ears">{t('search')}</span>}
+      placeholder={t('searchHint')}
+      type="text"
+      role="searchbox"
+      enterKeyHint="search"
+      autoComplete="off"
+      autoCapitalize="none"
+      spellCheck={false}
+      leadIcon={<Search aria-hidden size={22} />}
+      value={value}
+      onChange={(event) => {
+        onChange(event.currentTarget.value);
+      }}
+      {...(value === '' ? {} : clear)}
+    />
   );
 }
 
@@ -114,58 +134,75 @@ function ChoiceLine({ query, place, places }: StarsToolbarProps) {
   return parts.join(' · ');
 }
 
-function Selects({
-  query,
-  choose,
+interface SelectProps {
+  query: StarListQuery;
+  choose: (patch: Partial<StarListQuery>) => void;
+  forEars?: boolean;
+}
+
+function OrderSelect({ query, choose }: SelectProps) {
+  const { t } = useTranslation('stars');
+  return (
+    <SelectField
+      label={t('sortBy')}
+      value={query.sort}
+      onChange={(event) => {
+        choose({ sort: event.currentTarget.value as SortKey, descending: false });
+      }}
+    >
+      {SORT_KEYS.map((key) => (
+        <option key={key} value={key}>
+          {t(`sort.${key}`)}
+        </option>
+      ))}
+    </SelectField>
+  );
+}
+
+function DoesSelect({ query, choose, forEars = false }: SelectProps) {
+  const { t } = useTranslation('stars');
+  return (
+    <SelectField
+      className={forEars ? 'w-56' : undefined}
+      label={<span className={forEars ? 'for-ears' : undefined}>{t('does.label')}</span>}
+      value={query.does}
+      onChange={(event) => {
+        const does = event.currentTarget.value as Does;
+        choose({ does, ...(does === 'any' || does === 'dated' ? {} : { show: 'all' as const }) });
+      }}
+    >
+      {DOES.map((does) => (
+        <option key={does} value={does}>
+          {t(`does.${does}`)}
+        </option>
+      ))}
+    </SelectField>
+  );
+}
+
+/** Only where there is something to choose. */
+export function PlaceSelect({
   place,
   places,
   onPlace,
-}: StarsToolbarProps & { choose: (patch: Partial<StarListQuery>) => void }) {
-  const { t } = useTranslation(['stars', 'common']);
+  forEars = false,
+}: Pick<StarsToolbarProps, 'place' | 'places' | 'onPlace'> & { forEars?: boolean }) {
+  const { t } = useTranslation('common');
+  if (places.length < 2) return null;
   return (
-    <>
-      <SelectField
-        label={t('sortBy')}
-        value={query.sort}
-        onChange={(event) => {
-          choose({ sort: event.currentTarget.value as SortKey, descending: false });
-        }}
-      >
-        {SORT_KEYS.map((key) => (
-          <option key={key} value={key}>
-            {t(`sort.${key}`)}
-          </option>
-        ))}
-      </SelectField>
-      <SelectField
-        label={t('does.label')}
-        value={query.does}
-        onChange={(event) => {
-          const does = event.currentTarget.value as Does;
-          choose({ does, ...(does === 'any' || does === 'dated' ? {} : { show: 'all' as const }) });
-        }}
-      >
-        {DOES.map((does) => (
-          <option key={does} value={does}>
-            {t(`does.${does}`)}
-          </option>
-        ))}
-      </SelectField>
-      {places.length > 1 && (
-        <SelectField
-          label={t('common:place.choose')}
-          value={place.id}
-          onChange={(event) => {
-            onPlace(event.currentTarget.value);
-          }}
-        >
-          {places.map((each) => (
-            <option key={each.id} value={each.id}>
-              {each.name}
-            </option>
-          ))}
-        </SelectField>
-      )}
-    </>
+    <SelectField
+      className={forEars ? 'w-48' : undefined}
+      label={<span className={forEars ? 'for-ears' : undefined}>{t('place.choose')}</span>}
+      value={place.id}
+      onChange={(event) => {
+        onPlace(event.currentTarget.value);
+      }}
+    >
+      {places.map((each) => (
+        <option key={each.id} value={each.id}>
+          {each.name}
+        </option>
+      ))}
+    </SelectField>
   );
 }

@@ -8,12 +8,12 @@ import { readYear } from '../model/civil-year.js';
 export function YearStepper({
   year,
   onChange,
-  hint,
+  labelForEars = false,
   className,
 }: {
   year: number;
   onChange: (year: number) => void;
-  hint?: string | undefined;
+  labelForEars?: boolean | undefined;
   className?: string | undefined;
 }) {
   const { t } = useTranslation('stars');
@@ -21,8 +21,7 @@ export function YearStepper({
   return (
     <Stepper
       className={className}
-      label={t('year')}
-      hint={hint}
+      label={<span className={labelForEars ? 'for-ears' : undefined}>{t('year')}</span>}
       value={year}
       min={FIRST_YEAR}
       max={LAST_YEAR}

@@ -33,14 +33,17 @@ export function monthStarts(year: number, firstDayNumber: number): { dayNumber: 
   });
 }
 
-/** The civil date of a day number within a civil year, as month and day. */
-export function dateWithin(dayNumber: number, year: number, firstDayNumber: number): PlainDate {
-  const months = monthStarts(year, firstDayNumber);
-  const index = Math.max(
-    0,
-    months.findLastIndex((month) => dayNumber >= month.dayNumber),
-  );
-  const day = dayNumber - (months[index]?.dayNumber ?? firstDayNumber) + 1;
+/** The civil date of a day number within a civil year, whose months begin as `monthStarts` says. */
+export function dateWithin(
+  dayNumber: number,
+  year: number,
+  months: readonly { dayNumber: number }[],
+): PlainDate {
+  let index = 0;
+  months.forEach((month, at) => {
+    if (dayNumber >= month.dayNumber) index = at;
+  });
+  const day = dayNumber - (months[index]?.dayNumber ?? dayNumber) + 1;
   return { year: isJulian(year) ? 2000 : year, month: index + 1, day };
 }
 

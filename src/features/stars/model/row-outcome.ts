@@ -29,13 +29,17 @@ export function brightnessWord(vMag: number): BrightnessWord {
   return vMag <= 2.5 ? 'middling' : 'faint';
 }
 
+const formats = new Map<string, Intl.NumberFormat>();
+
 /** `−1.5`, `0.9`: one decimal, with a real minus sign. */
 export function magnitudeText(vMag: number, language: string): string {
-  return new Intl.NumberFormat(language, {
-    minimumFractionDigits: 1,
-    maximumFractionDigits: 1,
-    signDisplay: 'negative',
-  })
-    .format(vMag)
-    .replace('-', '−');
+  const format =
+    formats.get(language) ??
+    new Intl.NumberFormat(language, {
+      minimumFractionDigits: 1,
+      maximumFractionDigits: 1,
+      signDisplay: 'negative',
+    });
+  formats.set(language, format);
+  return format.format(vMag).replace('-', '−');
 }
