@@ -90,8 +90,9 @@ export async function run(command, args, options = {}) {
     child.once('error', (error) => {
       resolve({ code: 127, output: `${output}${error.message}\n` });
     });
-    child.once('close', (code) => {
+    child.once('close', (code, signal) => {
       endable.delete(child);
+      if (signal) process.stdout.write(`${command} was ended by ${signal}.\n`);
       resolve({ code: code ?? 1, output });
     });
   });
