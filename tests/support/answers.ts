@@ -7,9 +7,8 @@ export interface Sent {
   body: unknown;
 }
 
-type Answer = unknown;
-/** Answers by `METHOD /path` without the query; a function gets what was sent. */
-export type Answers = Readonly<Record<string, Answer | ((sent: Sent, search: URLSearchParams) => Answer)>>;
+/** Answers by `METHOD /path` without the query: a value, or a function of what was sent. */
+export type Answers = Readonly<Record<string, unknown>>;
 
 /**
  * Replaces `fetch` with answers of one's own and keeps what was sent. What has no answer is refused loudly; the

@@ -1,6 +1,6 @@
 import { ChevronLeft, ChevronRight } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import { OFFSET_MAX_DAYS, type EntryOffsets } from '#shared/contracts/calendars.js';
+import { OFFSET_MAX_DAYS, type EntryOffsets, type EntryWindow } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { signed } from '#src/lib/signed.js';
 import { Button } from '#src/ui/button.js';
@@ -15,6 +15,13 @@ const LABELS = {
   lastAdvisedDays: 'days.lastAdvised',
 } as const satisfies Record<keyof EntryOffsets, string>;
 
+const POINTS = {
+  earliestDays: 'earliest',
+  bestFromDays: 'bestFrom',
+  bestToDays: 'bestTo',
+  lastAdvisedDays: 'lastAdvised',
+} as const satisfies Record<keyof EntryOffsets, keyof EntryWindow>;
+
 /** Four days, each stepped away from the leading day, with the date it comes to. */
 export function OffsetSteppers({ form }: { form: FormState }) {
   const { t } = useTranslation('calendars');
@@ -22,10 +29,10 @@ export function OffsetSteppers({ form }: { form: FormState }) {
   const { draft, change, at, content } = form;
   const lead = leadDayNumber(form);
   const isFixedLast = form.dates?.window?.lastAdvisedBy === 'fixed';
+  // Where the last date cuts the window, the cut day is what counts, not the day that was stepped to.
   const dateOf = (name: keyof EntryOffsets) => {
-    if (name === 'lastAdvisedDays' && isFixedLast && form.dates?.window) {
-      return dates.day(form.dates.window.lastAdvised);
-    }
+    const window = form.dates?.window;
+    if (window) return dates.day(window[POINTS[name]]);
     return lead === null ? '' : dates.day(lead + draft.offsets[name]);
   };
   return (

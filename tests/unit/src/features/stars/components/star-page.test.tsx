@@ -34,7 +34,7 @@ async function open(markerKey: string, { year = 2027, session = OFFICER, state =
   return view;
 }
 
-const plain = (element: Element | null | undefined) => element?.textContent?.replaceAll('\u00a0', ' ') ?? '';
+const plain = (element: Element | null | undefined) => element?.textContent.replaceAll('\u00a0', ' ') ?? '';
 const card = (title: string) => screen.getByRole('heading', { name: title }).closest('section');
 
 describe('the page of a star', () => {

@@ -69,7 +69,7 @@ describe('the table of stars', () => {
     if (!pleiades) throw new Error('no row');
     const cells = within(pleiades)
       .getAllByRole('cell')
-      .map((cell) => cell.textContent?.replaceAll('\u00a0', ' '));
+      .map((cell) => cell.textContent.replaceAll('\u00a0', ' '));
     const occurrence = tables.get(2027)?.items.find((row) => row.markerKey === 'pleiades');
     expect(occurrence?.phenomena['heliacal-rising'].outcome).toBe('dated');
     for (const index of [1, 3, 4, 5]) {
@@ -161,7 +161,7 @@ describe('the stars on a phone', () => {
     await open('/stars?q=pleiades');
     const heading = await screen.findByRole('heading', { name: 'Pleiades' });
     const card = heading.closest('article');
-    expect(card?.textContent?.replaceAll('\u00a0', ' ')).toMatch(
+    expect(card?.textContent.replaceAll('\u00a0', ' ')).toMatch(
       /Comes back on the morning of about \d+ June, between \d+ and \d+ June, after about \d+ nights out of sight\./,
     );
     expect(card?.querySelector('svg[role="img"][aria-label*="2027"]')).not.toBeNull();
