@@ -50,9 +50,11 @@ function asAppError(error: unknown): AppError {
   if (type === 'entity.parse.failed' || (typeof status === 'number' && status >= 400 && status < 500)) {
     return new AppError('malformed-request');
   }
-  const databaseCode = String(driverError?.code ?? code ?? '');
+  const databaseCode = driverError?.code ?? code;
   return new AppError(
-    UNREACHABLE.has(databaseCode) ? 'database-unreachable' : ('something-broke' satisfies ProblemSlug),
+    typeof databaseCode === 'string' && UNREACHABLE.has(databaseCode)
+      ? 'database-unreachable'
+      : ('something-broke' satisfies ProblemSlug),
   );
 }
 

@@ -54,7 +54,7 @@ export const rowVersion = z.number().int().min(1);
 /** A month and a day that exist in every year. */
 export const monthDay = z
   .strictObject({ month: z.number().int().min(1).max(12), day: z.number().int().min(1).max(31) })
-  .refine(({ month, day }) => day <= daysInMonth(month), { path: ['day'], message: 'no-such-day' });
+  .refine(({ month, day }) => day <= daysInMonth(month), { path: ['day'], error: 'no-such-day' });
 export type MonthDay = z.infer<typeof monthDay>;
 
 /** 28 for February: a yearly date must exist every year. */

@@ -16,13 +16,17 @@ const officer = { email: 'officer@dawnpeg.example', password: 'limewash-and-pegs
 describe('GET /api/session', () => {
   it('answers nobody and a token to a visitor', async () => {
     const visitor = await api.visitor();
-    expect(visitor.session).toEqual({ person: null, memberships: null, csrfToken: expect.any(String) });
+    expect(visitor.session).toEqual({
+      person: null,
+      memberships: null,
+      csrfToken: expect.any(String) as string,
+    });
   });
 
   it('answers the person and their memberships after signing in', async () => {
     const client = await api.signIn('officer');
-    const { body } = await client.get('/api/session').expect(200);
-    expect(body).toMatchObject({
+    const answer = await client.get('/api/session').expect(200);
+    expect(answer.body).toMatchObject({
       person: { email: officer.email, displayName: 'Beyno' },
       memberships: [{ communityName: 'Upper Tazimel', roles: ['officer'] }],
     });

@@ -66,12 +66,12 @@ function authenticate(passport: Authenticator, request: Request): Promise<Person
     const middleware = passport.authenticate(
       'local',
       (error: unknown, user: Person | false | null | undefined) => {
-        if (error) reject(error as Error);
+        if (error) reject(asError(error));
         else resolve(user || null);
       },
     ) as RequestHandler;
     void middleware(request, {} as never, (error?: unknown) => {
-      reject(error as Error);
+      reject(asError(error));
     });
   });
 }
@@ -80,7 +80,7 @@ function authenticate(passport: Authenticator, request: Request): Promise<Person
 function logIn(request: Request, person: Person): Promise<void> {
   return new Promise((resolve, reject) => {
     request.logIn(person, (error: unknown) => {
-      if (error) reject(error as Error);
+      if (error) reject(asError(error));
       else resolve();
     });
   });
@@ -89,8 +89,13 @@ function logIn(request: Request, person: Person): Promise<void> {
 function logOut(request: Request): Promise<void> {
   return new Promise((resolve, reject) => {
     request.logOut((error: unknown) => {
-      if (error) reject(error as Error);
+      if (error) reject(asError(error));
       else resolve();
     });
   });
+}
+
+/** The libraries call back with whatever was thrown. */
+function asError(thrown: unknown): Error {
+  return thrown instanceof Error ? thrown : new Error('Signing in or out failed', { cause: thrown });
 }
