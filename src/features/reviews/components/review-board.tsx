@@ -101,6 +101,15 @@ function StewardSign({ version }: { version: Version }) {
   const say = useToast();
   const words = useProblemWords();
   const sign = useSign({ calendarId: version.calendarId, number: version.number });
+  // The button is gone once the signature counts; what follows is said all the same.
+  const signNow = async () => {
+    try {
+      const { state } = await sign.mutateAsync('steward');
+      say(state === 'signed-off' ? t('end.signedOff') : t('end.signed'));
+    } catch (cause) {
+      say(words.problem(cause));
+    }
+  };
   const { signAsSteward, signClosedBy } = version.may;
   if (!signAsSteward) {
     return signClosedBy === null ? null : (
@@ -117,14 +126,7 @@ function StewardSign({ version }: { version: Version }) {
         busy={sign.isPending}
         icon={<PenLine aria-hidden size={22} />}
         onClick={() => {
-          sign.mutate('steward', {
-            onSuccess: ({ state }) => {
-              say(state === 'signed-off' ? t('end.signedOff') : t('end.signed'));
-            },
-            onError: (cause) => {
-              say(words.problem(cause));
-            },
-          });
+          void signNow();
         }}
       >
         {t('board.signSteward')}

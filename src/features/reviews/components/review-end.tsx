@@ -77,6 +77,15 @@ function SignPart({ version }: { version: Version }) {
   const say = useToast();
   const words = useProblemWords();
   const sign = useSign({ calendarId: version.calendarId, number: version.number });
+  // The button is gone once the signature counts; what follows is said all the same.
+  const signNow = async () => {
+    try {
+      const { state } = await sign.mutateAsync('elder');
+      say(state === 'signed-off' ? t('end.signedOff') : t('end.signed'));
+    } catch (cause) {
+      say(words.problem(cause));
+    }
+  };
   const { signAsElder, signClosedBy } = version.may;
   if (!signAsElder && signClosedBy !== null) {
     return (
@@ -95,14 +104,7 @@ function SignPart({ version }: { version: Version }) {
         busy={sign.isPending}
         icon={<PenLine aria-hidden size={24} />}
         onClick={() => {
-          sign.mutate('elder', {
-            onSuccess: ({ state }) => {
-              say(state === 'signed-off' ? t('end.signedOff') : t('end.signed'));
-            },
-            onError: (cause) => {
-              say(words.problem(cause));
-            },
-          });
+          void signNow();
         }}
       >
         {t('end.sign')}
