@@ -63,11 +63,14 @@ export function PlaceEditor(props: PlaceEditorProps) {
   const { year } = todayIn(draft.timeZone === '' ? null : knownZone(draft.timeZone));
 
   const { change: changeDraft } = state;
-  const change: FieldPart['change'] = (patch) => {
-    setRefused({});
-    setOverall(null);
-    changeDraft(patch);
-  };
+  const change = useCallback<FieldPart['change']>(
+    (patch) => {
+      setRefused({});
+      setOverall(null);
+      changeDraft(patch);
+    },
+    [changeDraft],
+  );
   const touch = useCallback((field: PlaceField) => {
     setLeft((before) => (before.has(field) ? before : new Set([...before, field])));
   }, []);
@@ -96,7 +99,7 @@ export function PlaceEditor(props: PlaceEditorProps) {
     }
     try {
       const saved = await save(reading.input, state.version);
-      state.takeSaved(saved);
+      state.takeSaved(saved, draft);
       setLeft(new Set());
       onSaved(saved);
     } catch (cause) {

@@ -64,6 +64,9 @@ export function PlaceView({ place, communityName }: { place: Place; communityNam
             <Board title={t('rule.title')}>
               <p className="mb-2 text-small text-umber-soft">{t('rule.trade')}</p>
               <Facts fields={RULE_FACTS} place={input} />
+              <p className="mt-2 text-small text-umber-soft">
+                {t('rule.source', { source: t(`rule.set.${place.thresholdSet}.source`) })}
+              </p>
             </Board>
           </div>
         </Columns>

@@ -66,7 +66,7 @@ export function PlacesList() {
 function PlaceCard({ place }: { place: Place }) {
   const { t, i18n } = useTranslation('places');
   const { topDeg, bottomDeg } = heightScale(place.skyline);
-  const highestDeg = Math.max(...place.skyline.map((point) => point.altitudeDeg));
+  const highestDeg = Math.max(0, ...place.skyline.map((point) => point.altitudeDeg));
   return (
     <Link to={paths.place(place.id)} className="board block text-umber no-underline hover:bg-lime-deep">
       <span className="flex items-center justify-between gap-3">
@@ -78,7 +78,7 @@ function PlaceCard({ place }: { place: Place }) {
           {writeCoordinate(place.latitudeDeg, 'latitude')}, {writeCoordinate(place.longitudeDeg, 'longitude')}
         </bdi>
         <span className="block">
-          {place.skyline.length === 0
+          {highestDeg === 0
             ? t('list.flat')
             : t('list.highest', { degrees: degreesText(highestDeg, i18n.language) })}
         </span>

@@ -22,10 +22,12 @@ export interface PointPanelProps {
   selected: number;
   onSelect: (index: number) => void;
   onChange: (points: SkylinePoint[]) => void;
+  /** Undoes taking a point away; other points may have changed meanwhile. */
+  onPutBack: (point: SkylinePoint) => void;
 }
 
 /** The chosen point of the skyline: go along, step its direction and height, add one, take it away. */
-export function PointPanel({ points, selected, onSelect, onChange }: PointPanelProps) {
+export function PointPanel({ points, selected, onSelect, onChange, onPutBack }: PointPanelProps) {
   const { t } = useTranslation('places');
   const words = useSkylineWords();
   const say = useToast();
@@ -43,8 +45,7 @@ export function PointPanel({ points, selected, onSelect, onChange }: PointPanelP
         : t('skyline.takenAway', { azimuth: words.degrees(point.azimuthDeg) });
     say(text, {
       onUndo: () => {
-        onChange([...points]);
-        onSelect(selected);
+        onPutBack(point);
       },
     });
   };

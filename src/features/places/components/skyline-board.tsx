@@ -12,7 +12,7 @@ import { Board } from '#src/ui/surfaces.js';
 import { EmptyState } from '#src/ui/waiting.js';
 import { readCoordinate } from '../model/coordinate.js';
 import { skylineOf } from '../model/place-draft.js';
-import { eightPoints, halfOf, heightScale, movePoint, type Half } from '../model/skyline-edit.js';
+import { eightPoints, halfOf, heightScale, movePoint, putBack, type Half } from '../model/skyline-edit.js';
 import { writeSkylineText } from '../model/skyline-text.js';
 import type { FieldPart } from './place-form-parts.js';
 import { PointPanel } from './point-panel.js';
@@ -154,7 +154,16 @@ export function SkylineBoard(part: FieldPart) {
           )}
         </div>
         {usesRings ? (
-          <PointPanel points={points} selected={chosen} onSelect={select} onChange={setPoints} />
+          <PointPanel
+            points={points}
+            selected={chosen}
+            onSelect={select}
+            onChange={setPoints}
+            onPutBack={(point) => {
+              change((now) => ({ skyline: putBack(now.skyline, point) }));
+              setShownHalf(halfOf(point.azimuthDeg));
+            }}
+          />
         ) : (
           <SkylineTableEditor {...part} text={draft.skylineText ?? ''} />
         )}

@@ -18,7 +18,7 @@ const ZoneChoice = lazy(() => import('./zone-choice.js'));
 
 /** The clock of the place: found from the coordinates, changed by hand where people keep another one. */
 export function TimeZoneField({ draft, change, problem, year }: FieldPart & { year: number }) {
-  const { t } = useTranslation('places');
+  const { t } = useTranslation(['places', 'common']);
   const [choosing, setChoosing] = useState(false);
   const zone = useFoundZone(draft.latitude, draft.longitude);
   const found = zone.found;
@@ -65,6 +65,11 @@ export function TimeZoneField({ draft, change, problem, year }: FieldPart & { ye
             {t('zone.useFound')}
           </Button>
         )}
+        {zone.state === 'not-reached' && (
+          <Button look="quiet" onClick={zone.tryAgain}>
+            {t('common:tryAgain')}
+          </Button>
+        )}
         {!mustChoose && (
           <Button
             look="quiet"
@@ -104,18 +109,31 @@ export function OffsetWords({ timeZone, year }: { timeZone: string; year: number
 
 type ZoneState = 'not-asked' | 'waiting' | 'found' | 'not-found' | 'not-reached';
 
-function useFoundZone(latitude: string, longitude: string): { state: ZoneState; found: string | null } {
+interface FoundZone {
+  state: ZoneState;
+  found: string | null;
+  tryAgain: () => void;
+}
+
+function useFoundZone(latitude: string, longitude: string): FoundZone {
   const settled = useSettled(`${latitude}|${longitude}`, PAUSE_MS);
   const [latitudeText = '', longitudeText = ''] = settled.split('|');
   const lat = readCoordinate(latitudeText, 'latitude');
   const lon = readCoordinate(longitudeText, 'longitude');
   const bothRead = lat.ok && lon.ok;
-  const { data, isFetching, isError } = useQuery({
+  const { data, isFetching, isError, refetch } = useQuery({
     ...timeZoneQuery(lat.ok ? lat.valueDeg : 0, lon.ok ? lon.valueDeg : 0),
     enabled: bothRead,
   });
-  if (!bothRead) return { state: 'not-asked', found: null };
-  if (isError) return { state: 'not-reached', found: null };
-  if (isFetching || data === undefined) return { state: 'waiting', found: null };
-  return data === null ? { state: 'not-found', found: null } : { state: 'found', found: data };
+  const answer = (state: ZoneState, found: string | null = null) => ({
+    state,
+    found,
+    tryAgain: () => {
+      void refetch();
+    },
+  });
+  if (!bothRead) return answer('not-asked');
+  if (isFetching) return answer('waiting');
+  if (isError || data === undefined) return answer('not-reached');
+  return data === null ? answer('not-found') : answer('found', data);
 }

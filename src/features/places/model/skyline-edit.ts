@@ -61,6 +61,13 @@ export function addPointAfter(
   return { points: list, index: list.indexOf(added) };
 }
 
+/** A point that was taken away, back in its place; it wins over one that stands there by now. */
+export function putBack(points: readonly SkylinePoint[], point: SkylinePoint): SkylinePoint[] {
+  return [...points.filter((each) => each.azimuthDeg !== point.azimuthDeg), point].sort(
+    (a, b) => a.azimuthDeg - b.azimuthDeg,
+  );
+}
+
 /** A level skyline to begin with: one point in each of the eight winds. */
 export function eightPoints(): SkylinePoint[] {
   return Array.from({ length: 8 }, (_, index) => ({ azimuthDeg: index * 45, altitudeDeg: 0 }));

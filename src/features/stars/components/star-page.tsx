@@ -21,6 +21,7 @@ import { phenomenonToTie } from '../model/tie.js';
 import { BasisBoard } from './basis-board.js';
 import { FourDays } from './four-days.js';
 import { NoPlace } from './no-place.js';
+import { OldData } from './old-data.js';
 import { useStarDates } from './star-dates.js';
 import { useStarNaming } from './star-names.js';
 import { YearBoard } from './year-board.js';
@@ -53,7 +54,7 @@ function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) 
   const list = useListAddress(place);
   const [year, setYear] = useState(() => readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year);
   const settledYear = useSettled(year, PAUSE_MS);
-  const { data, error, refetch, isPlaceholderData } = useQuery({
+  const { data, error, refetch, isPlaceholderData, dataUpdatedAt } = useQuery({
     ...starQuery(place.id, markerKey, settledYear),
     placeholderData: keepPreviousData,
   });
@@ -93,6 +94,7 @@ function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) 
       place={place}
       list={list}
       isLate={isPlaceholderData || settledYear !== year}
+      notice={error !== null && <OldData updatedAt={dataUpdatedAt} refetch={refetch} />}
       yearStepper={<YearStepper className="w-44" labelForEars year={year} onChange={changeYear} />}
     />
   );
@@ -103,10 +105,11 @@ interface StarScreenProps {
   place: Place;
   list: string;
   isLate: boolean;
+  notice: React.ReactNode;
   yearStepper: React.ReactNode;
 }
 
-function StarScreen({ star, place, list, isLate, yearStepper }: StarScreenProps) {
+function StarScreen({ star, place, list, isLate, notice, yearStepper }: StarScreenProps) {
   const { t } = useTranslation('stars');
   const mayTie = useRoles().is('officer');
   const naming = useStarNaming()(star);
@@ -132,6 +135,7 @@ function StarScreen({ star, place, list, isLate, yearStepper }: StarScreenProps)
           </ThumbBar>
         )}
       </Mast>
+      {notice}
       <div aria-busy={isLate} className={isLate ? 'opacity-85' : undefined}>
         <YearBoard star={star} title={naming.title} dates={dates} place={place} yearStepper={yearStepper} />
         {isJulian(star.year) && <p className="mt-3 text-small">{t('julian')}</p>}

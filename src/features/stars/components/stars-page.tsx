@@ -21,6 +21,7 @@ import { chooseRows, isGoodMarker } from '../model/star-choice.js';
 import { ROWS_STEP, type SortKey } from '../model/star-list-query.js';
 import type { StarRow } from '../model/star-rows.js';
 import { NoPlace } from './no-place.js';
+import { OldData } from './old-data.js';
 import { useStarDates } from './star-dates.js';
 import { StarCards } from './star-cards.js';
 import { starColumns, starFeatures } from './star-columns.js';
@@ -66,7 +67,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
   const thisYear = todayIn(place.timeZone).year;
   const { query, settledYear, set } = useStarList(thisYear);
   const isMid = useMediaQuery(FROM_MID);
-  const { data, error, refetch, isPlaceholderData } = useQuery({
+  const { data, error, refetch, isPlaceholderData, dataUpdatedAt } = useQuery({
     ...starTableQuery(place.id, settledYear),
     placeholderData: keepPreviousData,
   });
@@ -116,6 +117,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
         hasHeads={isMid}
         onPlace={choosePlace}
       />
+      {error !== null && data !== undefined && <OldData updatedAt={dataUpdatedAt} refetch={refetch} />}
       {isJulian(query.year) && <p className="mb-3 text-small">{t('julian')}</p>}
       {data === undefined ? (
         <Board>

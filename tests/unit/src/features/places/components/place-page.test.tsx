@@ -108,6 +108,52 @@ describe('the form of a place', () => {
   });
 });
 
+describe('an undo', () => {
+  it('puts a point back and leaves alone what was typed since', async () => {
+    answerWith(server({ place: TAZIMEL }));
+    const { user } = await open();
+    await screen.findByRole('button', { name: /^110°/ });
+    await user.click(screen.getByRole('button', { name: 'Take it away' }));
+    expect(screen.queryByRole('button', { name: /^110°/ })).toBeNull();
+    await write(user, 'Name of the place', 'Typed since');
+    await user.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(screen.getByRole('button', { name: /^110°.* 3.5° high/ })).toBeTruthy();
+    expect(screen.getByLabelText<HTMLInputElement>('Name of the place').value).toBe('Typed since');
+  });
+});
+
+describe('what is typed while a save is on its way', () => {
+  it('stays, and can be saved after it', async () => {
+    const saved = { place: TAZIMEL };
+    const answers = server(saved);
+    const put = answers[`PUT ${placePath}`] as (sent: { body: unknown }) => unknown;
+    let go: () => void = () => undefined;
+    const gate = new Promise<void>((resolve) => {
+      go = resolve;
+    });
+    let isFirst = true;
+    const log = answerWith({
+      ...answers,
+      [`PUT ${placePath}`]: async (sent: { body: unknown }) => {
+        if (isFirst) await gate;
+        isFirst = false;
+        return put(sent);
+      },
+    });
+    const { user } = await open();
+    await screen.findByLabelText('Latitude');
+    await write(user, 'Name of the place', 'First');
+    await user.click(save());
+    await write(user, 'Height, metres', '2222');
+    go();
+    await screen.findByText('First is saved. Its dates are computed anew.');
+    expect(screen.getByLabelText<HTMLInputElement>('Height, metres').value).toBe('2222');
+    await user.click(save());
+    await vi.waitFor(() => expect(saved.place.elevationM).toBe(2222));
+    expect(puts(log).at(-1)).toMatchObject({ name: 'First', elevationM: 2222, version: 4 });
+  });
+});
+
 describe('a save over a newer state', () => {
   it('shows both states field by field and saves what the person chose', async () => {
     const saved = { place: TAZIMEL };

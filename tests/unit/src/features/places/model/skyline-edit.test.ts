@@ -5,6 +5,7 @@ import {
   heightScale,
   movePoint,
   placesInView,
+  putBack,
   sunriseAzimuths,
   turnView,
 } from '#src/features/places/model/skyline-edit.js';
@@ -60,6 +61,24 @@ describe('adding a point', () => {
 
   it('begins a level skyline with the eight winds', () => {
     expect(eightPoints().map((point) => point.azimuthDeg)).toEqual([0, 45, 90, 135, 180, 225, 270, 315]);
+  });
+});
+
+describe('a point that was taken away', () => {
+  it('comes back in its place among what stands there by now', () => {
+    const now = [
+      { azimuthDeg: 0, altitudeDeg: 9 },
+      { azimuthDeg: 180, altitudeDeg: 2 },
+    ];
+    expect(putBack(now, { azimuthDeg: 90, altitudeDeg: 4 })).toEqual([
+      now[0],
+      { azimuthDeg: 90, altitudeDeg: 4 },
+      now[1],
+    ]);
+    expect(putBack(now, { azimuthDeg: 180, altitudeDeg: 5 })).toEqual([
+      now[0],
+      { azimuthDeg: 180, altitudeDeg: 5 },
+    ]);
   });
 });
 
