@@ -40,7 +40,8 @@ test('an officer goes from an empty place to a submission of five entries', asyn
     .getByRole('dialog')
     .getByRole('button', { name: /Submit/ })
     .click();
-  await expect(page.getByText('The draft is locked')).toBeVisible();
+  await expect(page.getByRole('heading', { name: 'Submission 1' })).toBeVisible();
+  await expect(page.getByText('In review').first()).toBeVisible();
 });
 
 test('what an officer typed survives a reload', async ({ page }) => {

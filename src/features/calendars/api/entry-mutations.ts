@@ -2,7 +2,7 @@ import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-q
 import { calendarsEndpoints, type Entry, type EntryInput } from '#shared/contracts/calendars.js';
 import { versionsEndpoints } from '#shared/contracts/versions.js';
 import { callApi } from '#src/lib/api-client.js';
-import { calendarKeys } from '#src/lib/calendar-queries.js';
+import { calendarKeys, versionQuery } from '#src/lib/calendar-queries.js';
 import { entriesQuery } from './calendars-queries.js';
 
 /** Shows an answer at once; then everything of the calendar looks again, because other entries may be told more. */
@@ -122,6 +122,9 @@ export function useSubmitDraft(calendarId: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: () => callApi(versionsEndpoints.submit, { params: { calendarId } }),
-    onSuccess: () => lookAgain(client, calendarId),
+    onSuccess: (version) => {
+      client.setQueryData(versionQuery(calendarId, version.number).queryKey, version);
+      void lookAgain(client, calendarId);
+    },
   });
 }

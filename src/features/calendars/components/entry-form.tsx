@@ -1,4 +1,4 @@
-import { useId, useRef, useState, type ReactNode } from 'react';
+import { useEffect, useId, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useEntryFacts } from '#src/lib/entry-facts.js';
 import { Button } from '#src/ui/button.js';
@@ -40,6 +40,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
   const { saved } = entry;
   const groups = useGroups(board, saved ? ['when'] : ['what', 'when'], saving);
   const { isWide } = editor.selection;
+  useFocusOnNew(groups, saved === null && isWide);
   const answers = editor.answers.get(entry.id);
   const edit = editor.edits.all.get(entry.id);
   const search = () => {
@@ -116,6 +117,14 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
       />
     </section>
   );
+}
+
+/** A new entry begins in its first field; a phone keeps its heading, so that no keyboard covers the view. */
+function useFocusOnNew({ goTo }: Groups, isWanted: boolean): void {
+  const go = useRef(goTo);
+  useEffect(() => {
+    if (isWanted) go.current('what');
+  }, [isWanted]);
 }
 
 const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'late', 'whose'];

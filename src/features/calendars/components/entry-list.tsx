@@ -1,5 +1,5 @@
 import { ArrowDownUp, Check, Plus } from 'lucide-react';
-import { useState } from 'react';
+import { useEffect, useRef, useState, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { Button } from '#src/ui/button.js';
@@ -18,6 +18,7 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
   const { calendar, shown, selected, selection, canWrite, answers } = editor;
   const { isWide } = selection;
   const span = yearSpan(calendar.year);
+  const list = useOpenRowInSight(selected?.id ?? null);
   const months = dates.months(calendar.year);
   return (
     <section aria-label={t('editor.list')}>
@@ -29,7 +30,7 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
       {isOrdering ? (
         <OrderList editor={editor} actions={actions} />
       ) : (
-        <ol className="entry-list">
+        <ol ref={list} className="entry-list">
           {shown.map((entry) => (
             <li key={entry.id}>
               <EntryRow
@@ -68,4 +69,19 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
       )}
     </section>
   );
+}
+
+/** Brings the row of the open entry into the list's own view; the page itself stays where it is. */
+function useOpenRowInSight(openId: string | null): RefObject<HTMLOListElement | null> {
+  const list = useRef<HTMLOListElement>(null);
+  useEffect(() => {
+    const box = list.current;
+    const row = box?.querySelector('[aria-current]')?.closest('li');
+    if (!box || !row || openId === null) return;
+    const { top, bottom } = row.getBoundingClientRect();
+    const view = box.getBoundingClientRect();
+    if (top < view.top) box.scrollTop -= view.top - top;
+    else if (bottom > view.bottom) box.scrollTop += bottom - view.bottom;
+  }, [openId]);
+  return list;
 }

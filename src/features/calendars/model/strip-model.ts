@@ -35,7 +35,7 @@ export function pairingOf(entry: ShownEntry | null): BoardPairing | null {
   return { laneKey: entry.content.lead.markerKey, dayNumber: entry.dates.marker.expected.dayNumber };
 }
 
-/** Entries without a bar. */
+/** Entries whose lead brings no day this year. One that goes by nothing yet is not among them. */
 export function undatedOf(entries: readonly ShownEntry[]): ShownEntry[] {
-  return entries.filter((entry) => !entry.dates?.window);
+  return entries.filter((entry) => entry.dates !== null && entry.dates.window === null);
 }

@@ -8,6 +8,7 @@ import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
+import { useWideScreen } from '#src/lib/wide-screen.js';
 import { Button } from '#src/ui/button.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -27,6 +28,7 @@ export function ComparePage() {
   });
   const { seesDrafts } = useRolesIn(calendar.communityId);
   usePageTitle(t('compare.title'));
+  const isWide = useWideScreen();
   const asked = { from: search.get('from'), to: search.get('to') };
   const sides = sidesOf(asked, versions, seesDrafts);
   return (
@@ -36,16 +38,7 @@ export function ComparePage() {
         under={t('compare.under', { year: calendar.year, place: calendar.placeName })}
         backTo={paths.versions(calendarId)}
       >
-        {sides !== null && (
-          <Button
-            icon={<Printer aria-hidden size={20} />}
-            onClick={() => {
-              window.print();
-            }}
-          >
-            {t('compare.print')}
-          </Button>
-        )}
+        {sides !== null && isWide && <PrintButton />}
       </Mast>
       {sides === null ? (
         <Board>
@@ -62,9 +55,28 @@ export function ComparePage() {
             }}
           />
           <Compared calendarId={calendarId} sides={sides} seesDrafts={seesDrafts} />
+          {!isWide && (
+            <div className="mt-4">
+              <PrintButton />
+            </div>
+          )}
         </>
       )}
     </Page>
+  );
+}
+
+function PrintButton() {
+  const { t } = useTranslation('versions');
+  return (
+    <Button
+      icon={<Printer aria-hidden size={20} />}
+      onClick={() => {
+        window.print();
+      }}
+    >
+      {t('compare.print')}
+    </Button>
   );
 }
 

@@ -10,6 +10,7 @@ import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
+import { useWideScreen } from '#src/lib/wide-screen.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { StateIcon } from '#src/ui/icons/state-icon.js';
 import { Mast, Page } from '#src/ui/page.js';
@@ -26,12 +27,18 @@ export function VersionsPage() {
   const { data: calendar } = useSuspenseQuery(calendarQuery(calendarId));
   const { seesDrafts } = useRolesIn(calendar.communityId);
   const words = useProblemWords();
+  const isWide = useWideScreen();
   const versions = useQuery(versionsQuery(calendarId));
   usePageTitle(t('list.title'));
   const list = versions.data ?? [];
   const sides = list.length + (seesDrafts ? 1 : 0);
   const draftTask = useDraftTask(calendar);
   const versionTask = useVersionTask(calendarId);
+  const compare = sides > 1 && list.length > 0 && (
+    <ButtonLink to={paths.compare(calendarId)} icon={<GitCompareArrows aria-hidden size={20} />}>
+      {t('list.compare')}
+    </ButtonLink>
+  );
   return (
     <Page>
       <Mast
@@ -39,11 +46,7 @@ export function VersionsPage() {
         under={t('list.under', { year: calendar.year, place: calendar.placeName })}
         backTo={paths.calendars()}
       >
-        {sides > 1 && list.length > 0 && (
-          <ButtonLink to={paths.compare(calendarId)} icon={<GitCompareArrows aria-hidden size={20} />}>
-            {t('list.compare')}
-          </ButtonLink>
-        )}
+        {isWide && compare}
       </Mast>
       {versions.isPending && (
         <Board>
@@ -67,6 +70,7 @@ export function VersionsPage() {
           )}
         </Board>
       )}
+      {!isWide && compare && <div className="mt-4">{compare}</div>}
     </Page>
   );
 }

@@ -1,0 +1,43 @@
+import { describe, expect, it } from 'vitest';
+import { contentOf, differsFrom, draftOf, newDraft } from '#src/features/calendars/model/entry-draft.js';
+import { content } from '#tests/support/draft-of-tazimel.js';
+
+const lastDate = { date: { month: 7, day: 5 }, source: 'agricultural office' };
+
+describe('an entry while it is being written', () => {
+  it('comes back as it was saved', () => {
+    for (const saved of [
+      content(),
+      content({ hasLastDate: true, lastDate }),
+      content({ lead: { type: 'fixed-date', date: { month: 3, day: 1 }, source: 'the steward' } }),
+    ]) {
+      expect(contentOf(draftOf(saved))).toEqual(saved);
+      expect(differsFrom(draftOf(saved), saved)).toBe(false);
+    }
+  });
+
+  it('keeps the star while a fixed date is tried, and the last date while its mark is off', () => {
+    const draft = draftOf(content({ hasLastDate: true, lastDate }));
+    const tried = { ...draft, leadType: 'fixed-date' as const, hasLastDate: false };
+    expect(contentOf(tried).lead.type).toBe('fixed-date');
+    expect(contentOf(tried).lastDate).toBeNull();
+    const back = { ...tried, leadType: 'marker' as const, hasLastDate: true };
+    expect(contentOf(back)).toEqual(content({ hasLastDate: true, lastDate }));
+  });
+
+  it('is not changed by spaces that are not saved', () => {
+    const saved = content({ giver: 'Elder A-1' });
+    expect(differsFrom({ ...draftOf(saved), giver: 'Elder A-1 ' }, saved)).toBe(false);
+    expect(differsFrom({ ...draftOf(saved), giver: 'Elder A-2' }, saved)).toBe(true);
+  });
+
+  it('begins with the star that was chosen on its page', () => {
+    const { lead } = contentOf(newDraft({ markerKey: 'hr2491', phenomenon: 'heliacal-setting' }));
+    expect(lead).toEqual({
+      type: 'marker',
+      markerKey: 'hr2491',
+      phenomenon: 'heliacal-setting',
+      occurrence: 1,
+    });
+  });
+});

@@ -1,0 +1,24 @@
+import { describe, expect, it } from 'vitest';
+import { findMarkers } from '#src/features/calendars/model/marker-search.js';
+import { tazimelMarkers } from '#tests/support/draft-of-tazimel.js';
+
+const rows = [...(await tazimelMarkers()).values()];
+const found = (typed: string, inUse: string[] = [], chosen = '') =>
+  findMarkers(rows, typed, new Set(inUse), chosen).map(({ markerKey }) => markerKey);
+
+describe('choosing what an entry goes by', () => {
+  it('finds a star by name whatever the capitals, by letter and by number', () => {
+    expect(found('SIRI')[0]).toBe('hr2491');
+    expect(found('α CMa')).toContain('hr2491');
+    expect(found('hr 2491')[0]).toBe('hr2491');
+    expect(found('2491')[0]).toBe('hr2491');
+    expect(found('no such star')).toEqual([]);
+  });
+
+  it('brings the chosen one first, then what is in use, then figures, then the brighter stars', () => {
+    const [first, second, third, fourth, fifth] = found('', ['hr5056'], 'hr6134');
+    expect([first, second]).toEqual(['hr6134', 'hr5056']);
+    expect([third, fourth].sort()).toEqual(['orion-belt', 'pleiades']);
+    expect(fifth).toBe('hr2491');
+  });
+});

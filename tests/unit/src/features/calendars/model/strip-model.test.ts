@@ -1,0 +1,44 @@
+import { describe, expect, it } from 'vitest';
+import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
+import { barsOf, lanesOf, pairingOf, undatedOf } from '#src/features/calendars/model/strip-model.js';
+import type { ShownEntry } from '#src/features/calendars/model/preview-dates.js';
+import { entryOf, tazimelMarkers } from '#tests/support/draft-of-tazimel.js';
+
+const markers = await tazimelMarkers();
+const shown = (id: number, changes = {}): ShownEntry => {
+  const saved = entryOf(markers, id, changes);
+  return { id: saved.id, saved, content: saved.content, dates: saved.dates, unsaved: false };
+};
+const goesBy = (markerKey: string, phenomenon = 'heliacal-rising') => ({
+  lead: { type: 'marker', markerKey, phenomenon, occurrence: 1 },
+});
+const fixed = { lead: { type: 'fixed-date', date: { month: 7, day: 5 }, source: 'office' } };
+
+describe('the year’s strip', () => {
+  it('has a lane for each star in use, once, in the order of the entries', () => {
+    const entries = [shown(1, goesBy('hr5056')), shown(2, fixed), shown(3), shown(4, goesBy('hr5056'))];
+    expect(lanesOf(entries, markers).map(({ markerKey }) => markerKey)).toEqual(['hr5056', 'pleiades']);
+    expect(lanesOf(entries, null)).toEqual([]);
+  });
+
+  it('has a bar for each window and names what has none', () => {
+    const undated = shown(2, goesBy('hr424'));
+    const entries = [shown(1, { protectiveWatch: true }), undated];
+    const [bar, ...more] = barsOf(entries, ({ content }) => content.titleOfficer);
+    expect(more).toEqual([]);
+    expect(bar).toMatchObject({ name: 'Sow long millet', kind: 'watch' });
+    expect(bar?.days.earliest).toBe(dayNumberFromIso(entries[0]?.dates?.window?.earliest ?? ''));
+    const begun: ShownEntry = { ...shown(3), saved: null, dates: null };
+    expect(undatedOf([...entries, begun])).toEqual([undated]);
+  });
+
+  it('joins a window to its star’s day, and a fixed date to nothing', () => {
+    const one = shown(1);
+    expect(pairingOf(one)).toEqual({
+      laneKey: 'pleiades',
+      dayNumber: one.dates?.marker?.expected.dayNumber,
+    });
+    expect(pairingOf(shown(2, fixed))).toBeNull();
+    expect(pairingOf(null)).toBeNull();
+  });
+});
