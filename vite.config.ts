@@ -29,7 +29,7 @@ export default defineConfig({
         test: {
           name: 'unit',
           environment: 'node',
-          include: ['tests/unit/{shared,server}/**/*.test.ts'],
+          include: ['tests/unit/{shared,server,docker-free-scripts}/**/*.test.ts'],
           setupFiles: [quiet],
           testTimeout: 30_000,
         },
