@@ -47,6 +47,17 @@ export function assertYear(year: unknown, field = 'year'): asserts year is numbe
   }
 }
 
+/** Some years in their order; each one only once. */
+export function assertYears(years: readonly number[]): void {
+  if (!isList(years) || years.length === 0) throw new SkyRangeError('years', 'Give a list of whole years.');
+  years.forEach((year, index) => {
+    assertYear(year, `years.${index}`);
+    const before = years[index - 1];
+    if (before !== undefined && before >= year)
+      throw new SkyRangeError(`years.${index}`, 'Give the years in ascending order, each one once.');
+  });
+}
+
 function assertLatitude(value: unknown, field: string): void {
   assertNumber(field, value, -90, 90, 'degrees, north positive');
 }

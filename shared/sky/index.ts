@@ -15,11 +15,13 @@ import {
   assertSettings,
   assertSite,
   assertYear,
+  assertYears,
 } from './argument-checks.js';
 import { type CompassPoint, compassPoint as nearestPoint } from './horizon/compass.js';
 import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
 import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
+import { DriftSolver, gregorianShiftDays as shiftDays } from './markers/marker-drift.js';
 import { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
 import { markerYearOf } from './markers/marker-year.js';
 import { markerAtPlace, placeYearOf } from './markers/place-year.js';
@@ -43,6 +45,7 @@ import type {
   DepthAtCrossingCase,
   DepthAtCrossingYear,
   ExpectedDates,
+  MarkerDrift,
   MarkerKey,
   MarkerYear,
   MoonPhase,
@@ -121,6 +124,30 @@ export function computeSkyYear(
   const markers = markerKeys.map(markerOf);
   const placeYear = placeYearOf(preparedYearOf(year), site, settings);
   return markers.map((marker) => markerYearOf(placeYear, marker));
+}
+
+/**
+ * One marker at a place in each of some years: four phenomena with ranges and the Sun's longitude, the pace in days per
+ * century, and where a phenomenon begins or ceases to exist. Only the instants that are asked for are solved.
+ * @param years whole years from −3000 to 3000, ascending
+ */
+export function driftOf(
+  markerKey: MarkerKey,
+  site: Site,
+  settings: VisibilitySettings,
+  years: readonly number[],
+): MarkerDrift {
+  assertSite(site);
+  assertSettings(settings);
+  assertYears(years);
+  return new DriftSolver(markerOf(markerKey), site, settings).solve(years);
+}
+
+/** How many days later in the Gregorian year the second instant (JD UT) falls than the first, −183 to 183. */
+export function gregorianShiftDays(fromJdUt: number, toJdUt: number): number {
+  assertFinite('fromJdUt', fromJdUt);
+  assertFinite('toJdUt', toJdUt);
+  return shiftDays(fromJdUt, toJdUt);
 }
 
 /**

@@ -134,6 +134,43 @@ export interface MarkerYear {
   basis: Basis;
 }
 
+/** One occurrence of an epoch, with the one label that no calendar bends. */
+export interface DriftDay extends Occurrence {
+  /** Apparent ecliptic longitude of the Sun on the expected day, 0…360°: 90 is the June solstice in any year. */
+  sunLongitudeDeg: number;
+}
+
+/** What a marker does in one of the years asked for; the same days as in its MarkerYear. */
+export interface DriftEpoch {
+  year: number;
+  outcome: StarOutcome;
+  outcomeDetail: StarOutcomeDetail | null;
+  phenomena: Readonly<Record<Phenomenon, { outcome: PhenomenonOutcome; occurrences: readonly DriftDay[] }>>;
+}
+
+/** Where a phenomenon begins or ceases to exist between two of the years asked for. */
+export interface DriftTurn {
+  phenomenon: Phenomenon;
+  change: 'begins' | 'ceases';
+  /** First year of the new state. */
+  year: number;
+  /** What the star does while there is no date; `rises-and-sets` means that the sky is never dark enough. */
+  outcome: StarOutcome;
+  outcomeDetail: StarOutcomeDetail | null;
+}
+
+/** A marker across the centuries at a place. */
+export interface MarkerDrift {
+  markerKey: MarkerKey;
+  /** In the order of the years asked for. */
+  epochs: readonly DriftEpoch[];
+  /** Days per century, later in the Gregorian year positive; null with fewer than two dated epochs. */
+  daysPerCentury: Readonly<Record<Phenomenon, number | null>>;
+  turns: readonly DriftTurn[];
+  /** That of the first year; only its year differs from the others'. */
+  basis: Basis;
+}
+
 /** A run of nights in the same state; both days belong to it. Day numbers lie within the civil year. */
 export interface StripSegment {
   state: NightState;

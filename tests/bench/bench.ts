@@ -4,10 +4,13 @@ import { DAILY_SEARCH_STAR, dailySearchStarYear, scanStarYear } from './comparis
 import { fastestMs } from './stopwatch.js';
 import { benchSettings, benchSite, hillSite } from './subject.js';
 
-import { expectedDates, prepareYear, STARS } from '#shared/sky/index.js';
+import { computeMarkerYear, driftOf, expectedDates, prepareYear, STARS } from '#shared/sky/index.js';
 
 /** 100 epochs over all years that the engine offers. */
 const EPOCHS = Array.from({ length: 100 }, (_, index) => -3000 + 60 * index);
+
+/** Aldebaran, the star of the plain scan too. */
+const DRIFTER = 'hr1457';
 
 const wholeSkyYear = (site: typeof benchSite, year: number): void => {
   expectedDates(site, benchSettings, year, prepareYear(year));
@@ -18,6 +21,10 @@ const wholeSkyYearHillsMs = fastestMs(25, () => wholeSkyYear(hillSite, 2027));
 const hundredEpochsMs = fastestMs(4, () => {
   for (const year of EPOCHS) wholeSkyYear(benchSite, year);
 });
+const driftHundredEpochsMs = fastestMs(7, () => driftOf(DRIFTER, benchSite, benchSettings, EPOCHS));
+const hundredFullYearsMs = fastestMs(4, () => {
+  for (const year of EPOCHS) computeMarkerYear(DRIFTER, benchSite, benchSettings, year);
+});
 const crossingScanStarYearMs = fastestMs(7, scanStarYear);
 const dailySearchStarYearMs = fastestMs(7, dailySearchStarYear);
 
@@ -26,6 +33,9 @@ const results = {
   wholeSkyYearMs: rounded(wholeSkyYearMs),
   wholeSkyYearHillsMs: rounded(wholeSkyYearHillsMs),
   hundredEpochsMs: rounded(hundredEpochsMs),
+  driftHundredEpochsMs: rounded(driftHundredEpochsMs),
+  hundredFullYearsMs: rounded(hundredFullYearsMs),
+  driftRatio: Math.round((EPOCHS.length * crossingScanStarYearMs) / driftHundredEpochsMs),
   crossingScanStarYearMs: rounded(crossingScanStarYearMs),
   dailySearchStarYearMs: rounded(dailySearchStarYearMs),
   ratio: Math.round((dailySearchStarYearMs * STARS.length) / wholeSkyYearMs),
@@ -35,6 +45,10 @@ const meanings: Record<keyof typeof results, string> = {
   wholeSkyYearMs: `${STARS.length} stars × 4 expected dates, one place, one year, preparation included (aim 10)`,
   wholeSkyYearHillsMs: 'the same over a skyline of 36 points',
   hundredEpochsMs: 'the same for 100 epochs from −3000 to 2940, flat horizon (aim 400)',
+  driftHundredEpochsMs:
+    'four phenomena with ranges of one star at the same epochs, preparation included (aim 30)',
+  hundredFullYearsMs: 'the same epochs as full star-years, nights hidden included',
+  driftRatio: 'plain scan of a hundred years ÷ drift',
   crossingScanStarYearMs: 'one star-year by the plain scan that the tests use as oracle',
   dailySearchStarYearMs: `one star-year by astronomy-engine’s daily rise and set search (${DAILY_SEARCH_STAR})`,
   ratio: 'daily search for the whole table ÷ whole sky (aim 5000)',

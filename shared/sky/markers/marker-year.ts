@@ -6,7 +6,8 @@ import type { ResolvedMarker } from './marker-key.js';
 import { phenomenonInYear } from './phenomenon-in-year.js';
 import { type MarkerAtPlace, markerAtPlace, type PlaceYear } from './place-year.js';
 
-function basisOf(marker: MarkerAtPlace): Basis {
+/** What a marker's dates rest on. */
+export function basisOf(marker: MarkerAtPlace): Basis {
   const { settings, threshold } = marker;
   const overridden = marker.marker.override !== null;
   return {
