@@ -37,9 +37,17 @@ export const anyDate = z.string().regex(/^-?\d{4}-\d{2}-\d{2}$/u);
 
 export const instant = z.iso.datetime();
 
+/** A number in an address. Empty text is no number: it must not be read as zero. */
+export function queryNumber<T extends z.ZodType<number>>(schema: (number: z.ZodCoercedNumber) => T) {
+  return z.preprocess(
+    (value) => (typeof value === 'string' && value.trim() === '' ? undefined : value),
+    schema(z.coerce.number('not-a-number')),
+  );
+}
+
 export const pageQuery = z.strictObject({
   cursor: z.string().max(200).optional(),
-  limit: z.coerce.number().int().min(1).max(200).optional(),
+  limit: queryNumber((number) => number.int().min(1).max(200)).optional(),
 });
 export type PageQuery = z.infer<typeof pageQuery>;
 

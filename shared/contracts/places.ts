@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { CLARITIES, SKYLINE_RULES, THRESHOLD_SETS } from '../sky/vocabulary.js';
-import { id, line, listOf, rowVersion } from './common.js';
+import { id, line, listOf, queryNumber, rowVersion } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
 import { ROLES } from './people.js';
 
@@ -126,8 +126,8 @@ export const placesEndpoints = {
     summary: 'The IANA time zone at given coordinates',
     access: signedIn,
     query: z.strictObject({
-      latitudeDeg: z.coerce.number().min(-90).max(90),
-      longitudeDeg: z.coerce.number().min(-180).max(180),
+      latitudeDeg: queryNumber((number) => number.min(-90).max(90)),
+      longitudeDeg: queryNumber((number) => number.min(-180).max(180)),
     }),
     response: timeZoneAnswer,
   }),

@@ -12,7 +12,7 @@ import {
   STAR_OUTCOMES,
   THRESHOLD_SETS,
 } from '../sky/vocabulary.js';
-import { anyDate, id, listOf } from './common.js';
+import { anyDate, id, listOf, queryNumber } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
 import { place, placeInput, skyline } from './places.js';
@@ -131,7 +131,9 @@ export const markerDetail = markerRow.extend({
 });
 export type MarkerDetail = z.infer<typeof markerDetail>;
 
-export const engineYear = z.coerce.number().int().min(FIRST_YEAR, 'year-range').max(LAST_YEAR, 'year-range');
+export const engineYear = queryNumber((number) =>
+  number.int().min(FIRST_YEAR, 'year-range').max(LAST_YEAR, 'year-range'),
+);
 const yearQuery = z.strictObject({ year: engineYear });
 const placeParams = z.strictObject({ placeId: id });
 

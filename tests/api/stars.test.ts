@@ -117,6 +117,11 @@ describe('the star table', () => {
     expect((answer.body as Problem).errors?.[0]?.field).toBe('year');
   });
 
+  it('asks for a year instead of reading an empty one as the year 0', async () => {
+    const refusal = (await observer.get(`${stars}?year=`).expect(422)).body as Problem;
+    expect(refusal.errors).toEqual([expect.objectContaining({ code: 'not-a-number' })]);
+  });
+
   it('is not there for another village', async () => {
     const stranger = await api.signIn('officer2');
     await stranger.get(`${stars}?year=2027`).expect(404);

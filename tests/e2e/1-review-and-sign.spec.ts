@@ -14,9 +14,8 @@ test.use({
 });
 test.describe.configure({ mode: 'serial' });
 
-test('an elder who answered everything signs', async ({ page }) => {
+test('an elder who answered everything is led to the signature at once', async ({ page }) => {
   await signIn(page, 'elder');
-  await page.getByRole('link', { name: 'Go on with the review' }).click();
   await expect(page.getByText('Every entry has your answer.')).toBeVisible();
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Sign it' }).click();
@@ -26,7 +25,6 @@ test('an elder who answered everything signs', async ({ page }) => {
 
 test('an elder meets one entry at a time, sees the kept difference, answers and signs', async ({ page }) => {
   await signIn(page, 'elder2');
-  await page.getByRole('link', { name: 'Go on with the review' }).click();
   await expect(page.getByRole('heading', { level: 1 })).toContainText('Sow long millet');
   await expect(page.getByText('we wait for the red star')).toBeVisible();
   await expectNoSidewaysScroll(page);
@@ -53,7 +51,6 @@ test('an elder meets one entry at a time, sees the kept difference, answers and 
 
 test('the elder who keeps another way signs as well, with the difference standing', async ({ page }) => {
   await signIn(page, 'elder3');
-  await page.getByRole('link', { name: 'Go on with the review' }).click();
   const answers = page.getByRole('group', { name: 'Your answer' });
   for (const title of ['Sow short millet', 'Bird-scaring rota']) {
     await expect(page.getByRole('heading', { level: 1 })).toContainText(title);

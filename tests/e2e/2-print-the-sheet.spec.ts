@@ -2,9 +2,10 @@ import { execFileSync } from 'node:child_process';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
 
-test('staff look at every page and take the PDF of the published version', async ({ page }) => {
+test('staff land on the sheet, look at every page and take the PDF of the published version', async ({
+  page,
+}) => {
   await signIn(page, 'staff');
-  await page.getByRole('link', { name: /can be printed/ }).click();
   await expect(page.getByRole('heading', { name: 'The sheet' })).toBeVisible();
   const pages = page.getByRole('list', { name: 'All pages' });
   // The server lays a whole year out and draws it once before the first page shows.
@@ -27,7 +28,6 @@ test('staff look at every page and take the PDF of the published version', async
 test('the year board shows its tiles on a phone as well', async ({ page }) => {
   await page.setViewportSize({ width: 320, height: 640 });
   await signIn(page, 'staff');
-  await page.getByRole('link', { name: /can be printed/ }).click();
   await page.getByRole('radio', { name: /Year board/ }).check();
   await expect(page.getByRole('img', { name: /Page 1/ })).toBeVisible({ timeout: 30_000 });
   await expectNoSidewaysScroll(page);

@@ -4,6 +4,7 @@ import { useForm } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import { Link, Navigate, useSearchParams } from 'react-router-dom';
 import { signInInput } from '#shared/contracts/session.js';
+import { ARRIVED } from '#src/lib/arrival.js';
 import { useFormProblems } from '#src/lib/form-problems.js';
 import { paths, safeNext } from '#src/lib/paths.js';
 import { useSession } from '#src/lib/session.js';
@@ -29,7 +30,7 @@ export function SignInPage() {
   const problems = useFormProblems(form, FIELDS);
   const next = search.get('next');
 
-  if (person !== null) return <Navigate to={safeNext(next)} replace />;
+  if (person !== null) return <Navigate to={safeNext(next)} state={ARRIVED} replace />;
   return (
     <Door title={t('signIn.title')} lead={next !== null && next !== '/' ? t('signIn.needed') : undefined}>
       <Board>

@@ -1,23 +1,26 @@
 import { useQuery } from '@tanstack/react-query';
 import { ArrowRight } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
+import { Navigate, useLocation } from 'react-router-dom';
 import type { Today, WaitingItem } from '#shared/contracts/today.js';
 import { useCurrentCommunity, useCurrentPlace, useRoles } from '#src/lib/community.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
+import { hasArrived } from '#src/lib/arrival.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
 import { EmptyState, Skeleton, StaleLine, TroubleNote } from '#src/ui/waiting.js';
 import { todayQuery } from '../api/today-query.js';
-import { useWaitingWords } from '../model/waiting-words.js';
+import { landingOf } from '../model/landing.js';
+import { addressOf, useWaitingWords } from '../model/waiting-words.js';
 import { ComingBoard } from './coming-board.js';
 import { PegBoard } from './peg-board.js';
 import { WaitingBoard } from './waiting-board.js';
 import { WatchCard } from './watch-card.js';
 
-/** Where everybody lands: what waits for them, the peg, and what to look for. */
+/** What waits for the person, the peg, and what to look for. Who comes in for one task is led on to it. */
 export function TodayPage() {
   const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
@@ -27,6 +30,10 @@ export function TodayPage() {
   const today = useQuery({ ...todayQuery(communityId, place?.id ?? null), enabled: !isLoading });
   usePageTitle(t('title'));
   const { data } = today;
+  const hasJustCome = useHasJustCome();
+  const { roles } = useRoles();
+  const landing = hasJustCome && data ? landingOf(roles, data.waiting) : null;
+  if (landing) return <Navigate to={addressOf(landing)} replace />;
   return (
     <Page>
       <Mast
@@ -45,6 +52,12 @@ export function TodayPage() {
       {data && <TodayBoards data={data} />}
     </Page>
   );
+}
+
+/** Signed in a moment ago, or opened the application here; not by the rail, which must always lead to Today. */
+function useHasJustCome(): boolean {
+  const location = useLocation();
+  return location.key === 'default' || hasArrived(location.state);
 }
 
 function TodayBoards({ data }: { data: Today }) {

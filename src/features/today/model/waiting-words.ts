@@ -47,7 +47,8 @@ export function useWaitingWords(): (item: WaitingItem) => WaitingLine {
   };
 }
 
-function addressOf({ kind, calendarId, number, entryId }: WaitingItem): string {
+/** Where the task is done. */
+export function addressOf({ kind, calendarId, number, entryId }: WaitingItem): string {
   const at = number ?? 1;
   switch (kind) {
     case 'answer-entries':
