@@ -32,7 +32,7 @@ function isList(value: unknown): value is readonly unknown[] {
   return Array.isArray(value);
 }
 
-function assertOneOf(field: string, value: unknown, words: readonly string[]): void {
+export function assertOneOf(field: string, value: unknown, words: readonly string[]): void {
   if (typeof value !== 'string' || !words.includes(value)) {
     throw new SkyRangeError(field, `Give one of these words: ${words.join(', ')}.`);
   }

@@ -11,6 +11,7 @@ import {
   assertDayNumber,
   assertFinite,
   assertLongitude,
+  assertOneOf,
   assertQuestion,
   assertSettings,
   assertSite,
@@ -20,6 +21,8 @@ import {
 import { type CompassPoint, compassPoint as nearestPoint } from './horizon/compass.js';
 import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
+import { lookAt } from './look/look-at.js';
+import type { Look } from './look/look-types.js';
 import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
 import { DriftSolver, gregorianShiftDays as shiftDays } from './markers/marker-drift.js';
 import { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
@@ -57,8 +60,10 @@ import type {
 } from './types.js';
 import { RAD_PER_DEG, DEG_PER_RAD } from './units/angle.js';
 import { SkyRangeError } from './units/sky-range-error.js';
+import { WATCH_SIDES, type WatchSide } from './vocabulary.js';
 
 export type * from './types.js';
+export type * from './look/look-types.js';
 export * from './vocabulary.js';
 export { MOON_QUARTERS } from './types.js';
 export { ELEVATION_M, SHIFT_DEG, SKYLINE_ALTITUDE_DEG, THRESHOLD_DEG } from './argument-checks.js';
@@ -188,13 +193,19 @@ export function yearStrip(markerYear: MarkerYear, site: Site, settings: Visibili
   return yearStripOf(markerAtPlace(placeYear, markerOf(markerYear.markerKey)));
 }
 
-/** When to stop looking in the morning and to begin in the evening of a civil day, so that nobody looks at the Sun. */
-export function watchTimes(site: Site, dayNumber: number): WatchTimes {
-  assertSite(site);
+/** The civil year that a day belongs to, if the engine offers it. */
+function civilYearOfDay(dayNumber: number): number {
   assertDayNumber(dayNumber);
   const gregorianYear = gregorianLabel(dayNumber).year;
   const year = gregorianYear >= FIRST_GREGORIAN_YEAR ? gregorianYear : julianLabel(dayNumber).year;
   assertYear(year, 'dayNumber');
+  return year;
+}
+
+/** When to stop looking in the morning and to begin in the evening of a civil day, so that nobody looks at the Sun. */
+export function watchTimes(site: Site, dayNumber: number): WatchTimes {
+  assertSite(site);
+  const year = civilYearOfDay(dayNumber);
   const clock = dayClockOf(site.timeZone, site.longitudeDeg);
   const ground = {
     latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
@@ -203,6 +214,26 @@ export function watchTimes(site: Site, dayNumber: number): WatchTimes {
   };
   const meanNoonJdUt = dayNumber - site.longitudeDeg / 360;
   return watchTimesOf(preparedYearOf(year), ground, dayNumber - clock.offsetDays(meanNoonJdUt));
+}
+
+/**
+ * Where and when to look for a star or figure on one morning (`dawn`) or evening (`dusk`) of a civil day: its path over the
+ * skyline with the Sun's depth along it, when it can be seen, when to stop or to begin, bright stars to start from, planets
+ * that could be taken for it, and the Moon. Altitudes are true ones, without refraction. A star that cannot be seen then is
+ * a result with an `outcome`, never a failure.
+ */
+export function whereToLook(
+  markerKey: MarkerKey,
+  site: Site,
+  settings: VisibilitySettings,
+  dayNumber: number,
+  side: WatchSide,
+): Look {
+  assertSite(site);
+  assertSettings(settings);
+  assertOneOf('side', side, WATCH_SIDES);
+  const placeYear = placeYearOf(preparedYearOf(civilYearOfDay(dayNumber)), site, settings);
+  return lookAt(markerAtPlace(placeYear, markerOf(markerKey)), site, dayNumber, side);
 }
 
 /** Altitude of a skyline in a direction; points are joined by straight lines, 0° and 360° are one point. */

@@ -51,6 +51,37 @@ export const NIGHT_STATES = [
 ] as const;
 export type NightState = (typeof NIGHT_STATES)[number];
 
+/** The two ends of a night at which people watch for stars that come and go. */
+export const WATCH_SIDES = ['dawn', 'dusk'] as const;
+export type WatchSide = (typeof WATCH_SIDES)[number];
+
+/** What the Sun does around the watch. */
+export const SUN_COURSES = ['sets-and-rises', 'stays-up', 'stays-down'] as const;
+export type SunCourse = (typeof SUN_COURSES)[number];
+
+/** What a watch brings: the star is seen, or why it is not. */
+export const LOOK_OUTCOMES = ['seen', 'too-light', 'not-up', 'never-clears-skyline', 'sun-stays-up'] as const;
+export type LookOutcome = (typeof LOOK_OUTCOMES)[number];
+
+export const NAKED_EYE_PLANETS = ['mercury', 'venus', 'mars', 'jupiter', 'saturn'] as const;
+export type NakedEyePlanet = (typeof NAKED_EYE_PLANETS)[number];
+
+export const MOON_SHAPES = [
+  'new',
+  'waxing-crescent',
+  'first-quarter',
+  'waxing-gibbous',
+  'full',
+  'waning-gibbous',
+  'last-quarter',
+  'waning-crescent',
+] as const;
+export type MoonShape = (typeof MOON_SHAPES)[number];
+
+/** How much the Moon takes from the view of the star. */
+export const MOONLIGHTS = ['none', 'some', 'strong'] as const;
+export type Moonlight = (typeof MOONLIGHTS)[number];
+
 /** Years the engine offers, astronomical numbering (0 = 1 BC). */
 export const FIRST_YEAR = -3000;
 export const LAST_YEAR = 3000;

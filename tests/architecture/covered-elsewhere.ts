@@ -16,4 +16,8 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/sheet/watermark.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
   'shared/sheet/year-legend.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sheet/year-tiles.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+  'shared/sky/look/body-places.ts': 'tests/reference/against-ephem-bodies.test.ts',
+  'shared/sky/look/look-path.ts': 'tests/unit/shared/sky/look/look-at.test.ts',
+  'shared/sky/look/sky-at.ts': 'tests/reference/against-erfa-horizontal.test.ts',
+  'shared/sky/phenomena/sun-place.ts': 'tests/unit/shared/sky/look/watch-window.test.ts',
 };

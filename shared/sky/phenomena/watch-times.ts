@@ -1,32 +1,16 @@
 import type { WatchTimes } from '../types.js';
-import { horizontalOf } from '../horizon/horizontal.js';
 import { levelSkyline, type Skyline } from '../horizon/skyline.js';
 import { refractionDeg } from '../horizon/refraction.js';
-import { localSiderealRad } from '../time/sidereal-clock.js';
-import { DEG_PER_RAD, RAD_PER_DEG, TAU, wrapPi } from '../units/angle.js';
+import { DEG_PER_RAD, RAD_PER_DEG, TAU } from '../units/angle.js';
 import type { PreparedYear } from './prepared-year.js';
 import type { Ground } from './skyline-crossing.js';
+import { sunPlaceAt } from './sun-place.js';
 
 /** Eyes and optics must be off the Sun's place well before it shows [safety margin of the product, not astronomy]. */
 const MARGIN_DAYS = 10 / 1440;
 const SUN_RADIUS_DEG = 16 / 60;
 const STEP_DAYS = 2 / 1440;
 const PRECISION_DAYS = 1 / 86_400;
-
-interface SunPlace {
-  altitudeRad: number;
-  azimuthRad: number;
-  hourAngleRad: number;
-}
-
-function sunPlaceAt(year: PreparedYear, ground: Ground, jdUt: number): SunPlace {
-  const longitude = year.sun.longitudeRad(jdUt);
-  const sinDeclination = Math.sin(longitude) * year.sinObliquity;
-  const rightAscension = Math.atan2(Math.sin(longitude) * year.cosObliquity, Math.cos(longitude));
-  const hourAngleRad = wrapPi(localSiderealRad(year.sidereal, jdUt, ground.longitudeRad) - rightAscension);
-  const cosDeclination = Math.sqrt(1 - sinDeclination * sinDeclination);
-  return { ...horizontalOf(ground.latitude, sinDeclination, cosDeclination, hourAngleRad), hourAngleRad };
-}
 
 /** How far the Sun's upper edge stands above a skyline, with refraction, radians. */
 function edgeClearance(year: PreparedYear, ground: Ground, skyline: Skyline, jdUt: number): number {
