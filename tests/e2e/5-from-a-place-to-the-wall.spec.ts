@@ -1,11 +1,13 @@
-import type { Page } from '@playwright/test';
+import { execFileSync } from 'node:child_process';
+import type { Browser, Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
 
 /*
  * An officer with a new place: coordinates as degrees and minutes, a skyline from a pasted table, a calendar for 2027
- * with five entries, and the submission that freezes them.
+ * with five entries, the submission that freezes them, and then everybody else's part until it hangs on the wall.
  */
+test.describe.configure({ mode: 'serial' });
 
 const WORK = [
   { title: 'Clean the channels', star: 'Pleiades' },
@@ -14,6 +16,8 @@ const WORK = [
   { title: 'Guard against birds', star: 'Regulus' },
   { title: 'Bring the harvest in', star: 'Spica' },
 ];
+
+let calendarPath = '';
 
 test('an officer goes from an empty place to a submission of five entries', async ({ page }) => {
   test.setTimeout(180_000);
@@ -42,6 +46,40 @@ test('an officer goes from an empty place to a submission of five entries', asyn
     .click();
   await expect(page.getByRole('heading', { name: 'Submission 1' })).toBeVisible();
   await expect(page.getByText('In review').first()).toBeVisible();
+  calendarPath = new URL(page.url()).pathname.replace(/\/versions.*$/u, '');
+});
+
+test('elders and the steward sign it, the officer publishes it, staff print it', async ({
+  page,
+  browser,
+}) => {
+  test.setTimeout(180_000);
+  await agreesAndSigns(browser, 'elder', calendarPath);
+  await agreesAndSigns(browser, 'elder2', calendarPath);
+
+  await signIn(page, 'steward');
+  await page.goto(`${calendarPath}/versions/1`);
+  await page.getByRole('button', { name: 'Sign as the steward' }).click();
+  await expect(page.getByText('with that the calendar is signed off')).toBeVisible();
+
+  const office = await browser.newPage();
+  await signIn(office, 'officer');
+  await office.goto(`${calendarPath}/versions/1`);
+  await office.getByRole('button', { name: 'Publish it' }).click();
+  await office.getByRole('dialog').getByRole('button', { name: 'Publish it' }).click();
+  await expect(office.getByRole('heading', { level: 1 })).toContainText('2027-1');
+  await office.close();
+
+  const print = await browser.newPage();
+  await signIn(print, 'staff');
+  await print.goto(`${calendarPath}/sheet`);
+  const made = print.waitForEvent('download', { timeout: 60_000 });
+  await print.getByRole('link', { name: 'Make the PDF' }).click();
+  const file = await (await made).path();
+  const words = execFileSync('pdftotext', ['-layout', file, '-'], { encoding: 'utf8' });
+  expect(words).toContain('2027-1');
+  for (const { title } of WORK) expect(words).toContain(title);
+  await print.close();
 });
 
 test('what an officer typed survives a reload', async ({ page }) => {
@@ -76,6 +114,21 @@ test('the stars and the editor fit a phone of 320 pixels', async ({ page }) => {
   await expect(page.getByRole('heading', { name: 'Calendar 2027' })).toBeVisible();
   await expectNoSidewaysScroll(page);
 });
+
+/** An elder goes through all entries on a phone, agrees to each and signs. */
+async function agreesAndSigns(browser: Browser, mailbox: string, calendar: string): Promise<void> {
+  const page = await browser.newPage({ viewport: { width: 360, height: 740 } });
+  await signIn(page, mailbox);
+  await page.goto(`${calendar}/versions/1/review`);
+  const answers = page.getByRole('group', { name: 'Your answer' });
+  for (const { title } of WORK) {
+    await expect(page.getByRole('heading', { level: 1 })).toContainText(title);
+    await answers.getByRole('button', { name: 'Agree' }).click();
+  }
+  await page.getByRole('button', { name: 'Sign it' }).click();
+  await expect(page.getByText('You have signed. Thank you.')).toBeVisible();
+  await page.close();
+}
 
 async function makePlace(page: Page): Promise<void> {
   await page.goto('/places/new');
