@@ -18,7 +18,7 @@ import {
   assertYear,
   assertYears,
 } from './argument-checks.js';
-import { type CompassPoint, compassPoint as nearestPoint } from './horizon/compass.js';
+import { compassPoint as nearestPoint } from './horizon/compass.js';
 import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
 import { lookAt } from './look/look-at.js';
@@ -60,6 +60,7 @@ import type {
 } from './types.js';
 import { RAD_PER_DEG, DEG_PER_RAD } from './units/angle.js';
 import { SkyRangeError } from './units/sky-range-error.js';
+import type { CompassPoint } from './vocabulary.js';
 import { WATCH_SIDES, type WatchSide } from './vocabulary.js';
 
 export type * from './types.js';
@@ -67,7 +68,6 @@ export type * from './look/look-types.js';
 export * from './vocabulary.js';
 export { MOON_QUARTERS } from './types.js';
 export { ELEVATION_M, SHIFT_DEG, SKYLINE_ALTITUDE_DEG, THRESHOLD_DEG } from './argument-checks.js';
-export { COMPASS_POINTS, type CompassPoint } from './horizon/compass.js';
 export { FIGURES } from './markers/figures.js';
 export { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
 export type { PreparedYear } from './phenomena/prepared-year.js';

@@ -82,6 +82,27 @@ export type MoonShape = (typeof MOON_SHAPES)[number];
 export const MOONLIGHTS = ['none', 'some', 'strong'] as const;
 export type Moonlight = (typeof MOONLIGHTS)[number];
 
+/** The sixteen directions of a compass card, clockwise from north. */
+export const COMPASS_POINTS = [
+  'n',
+  'nne',
+  'ne',
+  'ene',
+  'e',
+  'ese',
+  'se',
+  'sse',
+  's',
+  'ssw',
+  'sw',
+  'wsw',
+  'w',
+  'wnw',
+  'nw',
+  'nnw',
+] as const;
+export type CompassPoint = (typeof COMPASS_POINTS)[number];
+
 /** Years the engine offers, astronomical numbering (0 = 1 BC). */
 export const FIRST_YEAR = -3000;
 export const LAST_YEAR = 3000;

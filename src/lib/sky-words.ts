@@ -1,29 +1,9 @@
-import type { Phenomenon } from '#shared/sky/vocabulary.js';
+import { COMPASS_POINTS, type CompassPoint, type Phenomenon } from '#shared/sky/vocabulary.js';
 
 /** Which end of the night a phenomenon belongs to: its dates say "morning of" or "evening of". */
 export function endOfNight(phenomenon: Phenomenon): 'dawn' | 'dusk' {
   return phenomenon === 'heliacal-rising' || phenomenon === 'cosmical-setting' ? 'dawn' : 'dusk';
 }
-
-const COMPASS_POINTS = [
-  'n',
-  'nne',
-  'ne',
-  'ene',
-  'e',
-  'ese',
-  'se',
-  'sse',
-  's',
-  'ssw',
-  'sw',
-  'wsw',
-  'w',
-  'wnw',
-  'nw',
-  'nnw',
-] as const;
-export type CompassPoint = (typeof COMPASS_POINTS)[number];
 
 /** The nearest of sixteen compass points; azimuth from north through east. Words: `sky:compass.<point>`. */
 export function compassPoint(azimuthDeg: number): CompassPoint {

@@ -1,23 +1,4 @@
-/** The sixteen directions of a compass card, clockwise from north. */
-export const COMPASS_POINTS = [
-  'n',
-  'nne',
-  'ne',
-  'ene',
-  'e',
-  'ese',
-  'se',
-  'sse',
-  's',
-  'ssw',
-  'sw',
-  'wsw',
-  'w',
-  'wnw',
-  'nw',
-  'nnw',
-] as const;
-export type CompassPoint = (typeof COMPASS_POINTS)[number];
+import { COMPASS_POINTS, type CompassPoint } from '../vocabulary.js';
 
 const DEG_PER_POINT = 360 / COMPASS_POINTS.length;
 

@@ -1,4 +1,5 @@
-import { compassPoint, type CompassPoint } from '#src/lib/sky-words.js';
+import type { CompassPoint } from '#shared/sky/vocabulary.js';
+import { compassPoint } from '#src/lib/sky-words.js';
 
 /** A direction as a person says it: one of eight winds, and whether it lies a little to one side. */
 export interface DirectionWords {

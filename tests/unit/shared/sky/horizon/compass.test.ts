@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
-import { COMPASS_POINTS, compassPoint } from '#shared/sky/horizon/compass.js';
+import { compassPoint } from '#shared/sky/horizon/compass.js';
+import { COMPASS_POINTS } from '#shared/sky/vocabulary.js';
 
 describe('compass words', () => {
   it('name the sixteen directions clockwise from north', () => {
