@@ -4,7 +4,19 @@
  */
 
 /** The numeric core from the bottom to the top; a layer imports itself and those before it. */
-const skyLayers = ['units', 'time', 'stars', 'sun', 'horizon', 'phenomena', 'visibility', 'markers', 'look'];
+const skyLayers = [
+  'units',
+  'time',
+  'stars',
+  'sun',
+  'horizon',
+  'phenomena',
+  'visibility',
+  'markers',
+  'look',
+  'moon',
+  'planets',
+];
 
 /** The server's lower folders in the same order. */
 const serverLayers = ['config', 'db', 'storage', 'mail', 'print', 'http'];

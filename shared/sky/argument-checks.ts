@@ -171,3 +171,9 @@ export function assertFinite(field: string, value: unknown): void {
   if (typeof value !== 'number' || !Number.isFinite(value))
     throw new SkyRangeError(field, 'Give a finite number.');
 }
+
+/** A whole number of a short list: a count, a month. */
+export function assertWhole(field: string, value: unknown, min: number, max: number): void {
+  if (typeof value !== 'number' || !Number.isInteger(value) || value < min || value > max)
+    throw new SkyRangeError(field, `Give a whole number from ${min} to ${max}.`);
+}

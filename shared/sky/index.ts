@@ -65,6 +65,7 @@ import { WATCH_SIDES, type WatchSide } from './vocabulary.js';
 
 export type * from './types.js';
 export type * from './look/look-types.js';
+export * from './moon-door.js';
 export * from './vocabulary.js';
 export { MOON_QUARTERS } from './types.js';
 export { ELEVATION_M, SHIFT_DEG, SKYLINE_ALTITUDE_DEG, THRESHOLD_DEG } from './argument-checks.js';

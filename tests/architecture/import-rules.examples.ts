@@ -32,6 +32,8 @@ export const forbidden: readonly Forbidden[] = [
   ...breaks('sky-upward-phenomena', 'shared/sky/phenomena/rise.ts', 'shared/sky/visibility/see.ts'),
   ...breaks('sky-upward-visibility', 'shared/sky/visibility/see.ts', 'shared/sky/markers/marker.ts'),
   ...breaks('sky-upward-markers', 'shared/sky/markers/marker.ts', 'shared/sky/look/look.ts'),
+  ...breaks('sky-upward-look', 'shared/sky/look/look.ts', 'shared/sky/moon/month.ts'),
+  ...breaks('sky-upward-moon', 'shared/sky/moon/month.ts', 'shared/sky/planets/venus.ts'),
   ...breaks('sky-layers-below-the-door', 'shared/sky/markers/marker.ts', 'shared/sky/index.ts'),
   ...breaks('sky-through-its-door', 'server/features/stars/stars.service.ts', 'shared/sky/stars/star.ts'),
   ...breaks('sky-through-its-door', 'src/features/stars/strip.tsx', 'shared/sky/time/day.ts'),

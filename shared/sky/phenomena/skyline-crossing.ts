@@ -90,7 +90,7 @@ export function sinSunDepth(crossing: EclipticZenith, sunLongitudeRad: number): 
 export function sunAtCrossing(
   year: PreparedYear,
   latitude: Latitude,
-  crossing: SkylineCrossing,
+  crossing: Pick<SkylineCrossing, 'siderealRad'>,
   sunLongitudeRad: number,
 ): { depressionRad: number; azimuthRad: number } {
   const sinLongitude = Math.sin(sunLongitudeRad);
