@@ -10,6 +10,8 @@ import { calendarsRoutes } from './features/calendars/calendars.routes.js';
 import { CalendarsService } from './features/calendars/calendars.service.js';
 import { EntriesService } from './features/calendars/entries.service.js';
 import { SkyDatesService } from './features/calendars/sky-dates.service.js';
+import { finderRoutes } from './features/finder/finder.routes.js';
+import { FinderService } from './features/finder/finder.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
@@ -111,6 +113,8 @@ export function createApp(options: AppOptions): App {
   const stars = new StarsService(places, skyYears);
   placesRoutes(mount, places);
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
+
+  finderRoutes(mount, new FinderService(places));
 
   const sky = new SkyDatesService(skyYears);
   const contents = new FrozenContentService(dataSource, clock, sky);

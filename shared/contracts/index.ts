@@ -1,6 +1,7 @@
 import type { Endpoint } from './endpoint.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
+import { finderEndpoints } from './finder.js';
 import { healthEndpoints } from './health.js';
 import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
@@ -18,6 +19,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   peopleEndpoints,
   placesEndpoints,
   starsEndpoints,
+  finderEndpoints,
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

@@ -22,6 +22,7 @@ import { compassPoint as nearestPoint } from './horizon/compass.js';
 import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
 import { lookAt } from './look/look-at.js';
+import { moonOverPlaceOf } from './look/moon-over-place.js';
 import type { Look } from './look/look-types.js';
 import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
 import { DriftSolver, gregorianShiftDays as shiftDays } from './markers/marker-drift.js';
@@ -29,8 +30,10 @@ import { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marke
 import { markerYearOf } from './markers/marker-year.js';
 import { markerAtPlace, placeYearOf } from './markers/place-year.js';
 import { yearStripOf } from './markers/year-strip.js';
+import { sinDeepestSun } from './phenomena/deepest-sun.js';
 import { moonPhasesOf } from './phenomena/moon-phases.js';
 import { type PreparedYear, prepareYear as prepare } from './phenomena/prepared-year.js';
+import type { Ground } from './phenomena/skyline-crossing.js';
 import { watchTimesOf } from './phenomena/watch-times.js';
 import { preparedYearOf } from './phenomena/year-cache.js';
 import { dayClockOf, labelledDay } from './time/civil-day.js';
@@ -51,6 +54,7 @@ import type {
   MarkerDrift,
   MarkerKey,
   MarkerYear,
+  MoonOverPlace,
   MoonPhase,
   Site,
   SkylinePoint,
@@ -96,6 +100,14 @@ function markerOf(markerKey: MarkerKey): ResolvedMarker {
     );
   }
   return marker;
+}
+
+function groundOf(site: Site): Ground {
+  return {
+    latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
+    longitudeRad: site.longitudeDeg * RAD_PER_DEG,
+    skyline: prepareSkyline(site.skyline),
+  };
 }
 
 /**
@@ -206,15 +218,27 @@ function civilYearOfDay(dayNumber: number): number {
 /** When to stop looking in the morning and to begin in the evening of a civil day, so that nobody looks at the Sun. */
 export function watchTimes(site: Site, dayNumber: number): WatchTimes {
   assertSite(site);
-  const year = civilYearOfDay(dayNumber);
+  const prepared = preparedYearOf(civilYearOfDay(dayNumber));
   const clock = dayClockOf(site.timeZone, site.longitudeDeg);
-  const ground = {
-    latitude: latitudeOf(site.latitudeDeg * RAD_PER_DEG),
-    longitudeRad: site.longitudeDeg * RAD_PER_DEG,
-    skyline: prepareSkyline(site.skyline),
-  };
   const meanNoonJdUt = dayNumber - site.longitudeDeg / 360;
-  return watchTimesOf(preparedYearOf(year), ground, dayNumber - clock.offsetDays(meanNoonJdUt));
+  return watchTimesOf(prepared, groundOf(site), dayNumber - clock.offsetDays(meanNoonJdUt));
+}
+
+/**
+ * How deep the Sun sinks at most in the night that begins on the evening of a civil day, degrees below the mathematical
+ * horizon; negative where it stays up all night.
+ */
+export function darkestOfNightDeg(site: Site, dayNumber: number): number {
+  assertSite(site);
+  const prepared = preparedYearOf(civilYearOfDay(dayNumber));
+  return Math.asin(sinDeepestSun(prepared, groundOf(site), dayNumber)) * DEG_PER_RAD;
+}
+
+/** The Moon's lit share and altitude over a place at an instant. */
+export function moonOverPlace(site: Site, jdUt: number): MoonOverPlace {
+  assertSite(site);
+  assertFinite('jdUt', jdUt);
+  return moonOverPlaceOf(site, jdUt);
 }
 
 /**

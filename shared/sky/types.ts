@@ -222,3 +222,11 @@ export interface MoonPhase {
   quarter: MoonQuarter;
   jdUt: number;
 }
+
+/** The Moon at one instant over a place. */
+export interface MoonOverPlace {
+  /** 0 at new Moon, 1 at full Moon. */
+  litShare: number;
+  /** Of its centre above the mathematical horizon, without refraction. */
+  altitudeDeg: number;
+}

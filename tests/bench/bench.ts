@@ -4,6 +4,8 @@ import { DAILY_SEARCH_STAR, dailySearchStarYear, scanStarYear } from './comparis
 import { fastestMs } from './stopwatch.js';
 import { benchSettings, benchSite, hillSite } from './subject.js';
 
+import { findEverything, FOUND_KEYS } from './marker-finder.js';
+
 import { computeMarkerYear, driftOf, expectedDates, prepareYear, STARS } from '#shared/sky/index.js';
 
 /** 100 epochs over all years that the engine offers. */
@@ -25,6 +27,8 @@ const driftHundredEpochsMs = fastestMs(7, () => driftOf(DRIFTER, benchSite, benc
 const hundredFullYearsMs = fastestMs(4, () => {
   for (const year of EPOCHS) computeMarkerYear(DRIFTER, benchSite, benchSettings, year);
 });
+const markerFinderMs = fastestMs(5, () => findEverything(benchSite));
+const markerFinderHillsMs = fastestMs(5, () => findEverything(hillSite));
 const crossingScanStarYearMs = fastestMs(7, scanStarYear);
 const dailySearchStarYearMs = fastestMs(7, dailySearchStarYear);
 
@@ -36,6 +40,9 @@ const results = {
   driftHundredEpochsMs: rounded(driftHundredEpochsMs),
   hundredFullYearsMs: rounded(hundredFullYearsMs),
   driftRatio: Math.round((EPOCHS.length * crossingScanStarYearMs) / driftHundredEpochsMs),
+  markerFinderMs: rounded(markerFinderMs),
+  markerFinderHillsMs: rounded(markerFinderHillsMs),
+  markerFinderRatio: Math.round((FOUND_KEYS.length * crossingScanStarYearMs) / markerFinderMs),
   crossingScanStarYearMs: rounded(crossingScanStarYearMs),
   dailySearchStarYearMs: rounded(dailySearchStarYearMs),
   ratio: Math.round((dailySearchStarYearMs * STARS.length) / wholeSkyYearMs),
@@ -49,6 +56,10 @@ const meanings: Record<keyof typeof results, string> = {
     'four phenomena with ranges of one star at the same epochs, preparation included (aim 30)',
   hundredFullYearsMs: 'the same epochs as full star-years, nights hidden included',
   driftRatio: 'plain scan of a hundred years ÷ drift',
+  markerFinderMs: `${FOUND_KEYS.length} markers × 4 phenomena with ranges, ranked against a wanted day (aim 300)`,
+  markerFinderHillsMs: 'the same over a skyline of 36 points',
+  markerFinderRatio:
+    'plain scan of the same stars (one measured, times their number) ÷ finder, ranges and ranking in the finder only',
   crossingScanStarYearMs: 'one star-year by the plain scan that the tests use as oracle',
   dailySearchStarYearMs: `one star-year by astronomy-engine’s daily rise and set search (${DAILY_SEARCH_STAR})`,
   ratio: 'daily search for the whole table ÷ whole sky (aim 5000)',

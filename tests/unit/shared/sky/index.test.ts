@@ -65,6 +65,14 @@ describe('the door of the core', () => {
     }
   });
 
+  it('tells how dark a night gets: the Sun stays up at midsummer inside the polar circle', () => {
+    const dayOf = (month: number) => sky.dayNumberOf({ year: 2027, month, day: 21 }, 'gregorian');
+    // At its lower culmination the Sun stands 90° − latitude − declination below the horizon.
+    expect(sky.darkestOfNightDeg(siteAt(66), dayOf(6))).toBeCloseTo(90 - 66 - 23.44, 1);
+    expect(sky.darkestOfNightDeg(siteAt(70), dayOf(6))).toBeLessThan(0);
+    expect(sky.darkestOfNightDeg(siteAt(66), dayOf(12))).toBeCloseTo(90 - 66 + 23.44, 1);
+  });
+
   it('draws the strip of the year that it is given', () => {
     const site = siteAt(28);
     const strip = sky.yearStrip(sky.computeMarkerYear('pleiades', site, settings, 1200), site, settings);
