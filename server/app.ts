@@ -10,6 +10,8 @@ import { calendarsRoutes } from './features/calendars/calendars.routes.js';
 import { CalendarsService } from './features/calendars/calendars.service.js';
 import { EntriesService } from './features/calendars/entries.service.js';
 import { SkyDatesService } from './features/calendars/sky-dates.service.js';
+import { driftRoutes } from './features/drift/drift.routes.js';
+import { DriftService } from './features/drift/drift.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
@@ -115,6 +117,7 @@ export function createApp(options: AppOptions): App {
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
 
   finderRoutes(mount, new FinderService(places));
+  driftRoutes(mount, new DriftService(places));
 
   const sky = new SkyDatesService(skyYears);
   const contents = new FrozenContentService(dataSource, clock, sky);

@@ -5,9 +5,11 @@ import { isEasyToFind, type MarkerCandidate } from './marker-candidates.js';
  * 1. what a calendar should not lean on alone goes behind everything else, with the reason (`caution`);
  * 2. nearness, in steps that are no finer than a sighting scatters;
  * 3. the width of the range, in weeks;
- * 4. how easy the star is to see: figures and bright stars first, and a star that shows higher before one that must be
+ * 4. a return or a last sight before a last rising or a first setting: those happen in a sky that holds the star anyway,
+ *    and observers agree less about them [Schaefer1987];
+ * 5. how easy the star is to see: figures and bright stars first, and a star that shows higher before one that must be
  *    caught low over the ground;
- * 5. days away, days of range and brightness as they are, so that the order is the same every time.
+ * 6. days away, days of range and brightness as they are, so that the order is the same every time.
  */
 
 /** The wanted days, both included, as day numbers. */
@@ -123,10 +125,10 @@ function exactnessOf(rangeDays: number | null): Exactness {
 
 /** The first reason that weighs: a star that is never away is not missed, so nobody notices its return. */
 function cautionOf(candidate: MarkerCandidate, rangeDays: number | null): Caution | null {
-  const { notes, phenomenon } = candidate;
-  const isReturn = phenomenon === 'heliacal-rising' || phenomenon === 'heliacal-setting';
-  if (isReturn && notes.includes('never-disappears')) return 'never-disappears';
-  if (isReturn && notes.includes('lost-in-light-nights')) return 'lost-in-light-nights';
+  const { notes } = candidate;
+  const isBesideHiding = isEndOfSight(candidate);
+  if (isBesideHiding && notes.includes('never-disappears')) return 'never-disappears';
+  if (isBesideHiding && notes.includes('lost-in-light-nights')) return 'lost-in-light-nights';
   if (rangeDays === null) return 'open-range';
   return rangeDays > WIDE_DAYS ? 'weak-marker' : null;
 }
@@ -136,6 +138,7 @@ function inOrder(a: RankedMarker, b: RankedMarker): number {
     Number(a.caution !== null) - Number(b.caution !== null) ||
     NEARNESS.indexOf(a.nearness) - NEARNESS.indexOf(b.nearness) ||
     EXACTNESS.indexOf(a.exactness) - EXACTNESS.indexOf(b.exactness) ||
+    Number(!isEndOfSight(a)) - Number(!isEndOfSight(b)) ||
     EASE.indexOf(a.ease) - EASE.indexOf(b.ease) ||
     Number(isLow(a)) - Number(isLow(b)) ||
     Math.abs(a.daysAway) - Math.abs(b.daysAway) ||
@@ -143,6 +146,11 @@ function inOrder(a: RankedMarker, b: RankedMarker): number {
     a.vMag - b.vMag ||
     a.markerKey.localeCompare(b.markerKey)
   );
+}
+
+/** True for the two days between which a star is out of sight. */
+function isEndOfSight({ phenomenon }: MarkerCandidate): boolean {
+  return phenomenon === 'heliacal-rising' || phenomenon === 'heliacal-setting';
 }
 
 function isLow({ occurrence }: RankedMarker): boolean {

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { CLARITIES, PHENOMENON_OUTCOMES, SKY_NOTES, STAR_OUTCOMES } from '../sky/vocabulary.js';
 import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR } from './calendars.js';
-import { id } from './common.js';
+import { id, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
 import { civilDay, engineYear, markerKey, markerNames, occurrenceDays, phenomenon } from './stars.js';
@@ -162,6 +162,15 @@ export const finderEndpoints = {
     params: placeParams,
     query: finderQuery,
     response: finderAnswer,
+  }),
+  names: defineEndpoint({
+    id: 'listMarkerNames',
+    method: 'GET',
+    path: '/api/places/:placeId/finder/names',
+    summary: 'Every star and figure by its names, to choose an old sign from',
+    access: member('place', ...ROLES),
+    params: placeParams,
+    response: listOf(markerNames),
   }),
   compareYears: defineEndpoint({
     id: 'compareMarkerYears',

@@ -1,6 +1,7 @@
 import type { Endpoint } from './endpoint.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
+import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { healthEndpoints } from './health.js';
 import { peopleEndpoints } from './people.js';
@@ -20,6 +21,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   placesEndpoints,
   starsEndpoints,
   finderEndpoints,
+  driftEndpoints,
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

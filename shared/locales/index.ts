@@ -1,7 +1,9 @@
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
+import { texts as drift } from './en/drift.js';
 import { texts as files } from './en/files.js';
+import { texts as finder } from './en/finder.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
@@ -25,6 +27,8 @@ export const en = {
   people,
   places,
   stars,
+  finder,
+  drift,
   calendars,
   reviews,
   sheets,

@@ -6,6 +6,8 @@ export const PATTERNS = {
   account: '/account',
   stars: '/stars',
   star: '/stars/:markerKey',
+  drift: '/stars/:markerKey/drift',
+  finder: '/finder',
   newPlace: '/places/new',
   place: '/places/:placeId',
   village: '/village',
@@ -30,6 +32,20 @@ interface MarkerQuery {
   phenomenon?: string | undefined;
 }
 
+/** What the finder is asked, as its address has it. */
+interface FinderQuery {
+  placeId?: string;
+  year?: number;
+  /** `MM-DD`. */
+  from?: string;
+  by?: 'old';
+  old?: string;
+  its?: string;
+  since?: number;
+  calendar?: string;
+  entry?: string;
+}
+
 export const paths = {
   today: () => PATTERNS.today,
   signIn: (next?: string) => withQuery(PATTERNS.signIn, { next }),
@@ -40,6 +56,11 @@ export const paths = {
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
   star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>
     withQuery(`/stars/${encodeURIComponent(markerKey)}`, query),
+  /** How a marker moved through the centuries; `year` is the one on screen. */
+  drift: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>
+    withQuery(`/stars/${encodeURIComponent(markerKey)}/drift`, query),
+  /** Which marker falls near a day. With a calendar, its entry waits for the answer. */
+  finder: (query: FinderQuery = {}) => withQuery(PATTERNS.finder, { ...query }),
   newPlace: () => PATTERNS.newPlace,
   place: (placeId: string) => `/places/${encodeURIComponent(placeId)}`,
   village: () => PATTERNS.village,

@@ -144,6 +144,9 @@ function queryOf(endpoint: Endpoint, { publishedNumber }: Village): string {
     exportStarsCsv: '?year=2027',
     readStar: '?year=2027',
     listSkylineEffects: '?year=2027',
+    findMarkers: '?year=2027&from=06-10',
+    readDrift: '?from=1500&to=2027',
+    exportDriftCsv: '?from=1500&to=2027',
     compareVersions: `?from=${publishedNumber}&to=${publishedNumber}`,
   };
   return queries[endpoint.id] ?? '';
@@ -172,6 +175,10 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     createPlace: () => place,
     updatePlace: () => ({ ...place, ...stale }),
     previewSkylineEffects: () => ({ place, year: 2027 }),
+    compareMarkerYears: () => ({
+      years: [2027],
+      markers: [{ markerKey: 'pleiades', phenomenon: 'heliacal-rising' }],
+    }),
     createCalendar: () => ({ placeId: village.place.id, year: 2031 }),
     addEntry: () => entryInput(),
     updateEntry: () => ({ content: entryInput(), ...stale }),

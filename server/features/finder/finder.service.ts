@@ -15,6 +15,7 @@ import {
   type OldMarkerNow,
   type YearsAnswer,
 } from '#shared/contracts/finder.js';
+import type { MarkerNames } from '#shared/contracts/stars.js';
 import type { Place } from '#shared/contracts/places.js';
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import { civilDateFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
@@ -30,6 +31,7 @@ import type { Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
 import type { PlacesService } from '../places/places.service.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
+import { ALL_MARKER_KEYS, markerNamesOf } from '../stars/marker-names.service.js';
 import { toCivilDay, toFoundMarker, toNearestMarker, toOldMarkerNow } from './finder.mapper.js';
 import { PlaceCandidatesService } from './place-candidates.service.js';
 import { askedDays, yearsAround } from './wanted-days.js';
@@ -75,6 +77,12 @@ export class FinderService {
       },
       darkestDeg: darkestOfNightDeg(siteOf(place), Math.floor((wanted.from + wanted.to) / 2)),
     };
+  }
+
+  /** Every marker that a place's village can name. */
+  async names(actor: Actor, placeId: string): Promise<MarkerNames[]> {
+    await this.places.read(actor, placeId);
+    return ALL_MARKER_KEYS.map(markerNamesOf);
   }
 
   /** Days of some markers in some years; a screen asks a few years at a time, shows how far it is and may stop. */

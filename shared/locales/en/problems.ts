@@ -89,6 +89,7 @@ export const texts = {
     'year-range': 'The engine knows the years from −3000 to 3000.',
     'calendar-year': 'Calendars are made for the years 1900 to 2200.',
     'no-such-day': 'This month has no such day. For the end of February write the 28th.',
+    'year-order': 'The last year comes after the first one.',
     'month-day': 'Write a month and a day, such as 06-07.',
     'not-before-year': 'Give a year before the one that is asked for.',
     'span-too-long': 'Wanted days span at most three months.',

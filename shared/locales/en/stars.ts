@@ -25,6 +25,7 @@ export const texts = {
     'never-clears-skyline': 'Never seen here',
     'too-light': 'Lost in light nights',
   },
+  finder: 'Which sign falls near a day?',
   orderLine: 'Ordered by {{order}}',
   sortBy: 'In the order of',
   sort: {
@@ -207,6 +208,10 @@ export const texts = {
     basisRange: 'In about eight seasons of ten the day falls within its range.',
     basisCare: 'Haze, cloud, the Moon, hills and eyes can move a real sighting by several days.',
     place: 'Look at the place',
+    ways: 'More about it',
+    way: {
+      drift: 'How it moved through the centuries',
+    },
   },
 
   letter: {

@@ -9,6 +9,7 @@ import { useRolesIn } from '#src/lib/roles-in.js';
 import { useEditor } from '../model/use-editor.js';
 import { useEntryActions } from '../model/use-entry-actions.js';
 import { useSaveEntry } from '../model/use-save-entry.js';
+import { useWantedMarker } from '../model/use-wanted-marker.js';
 import { DraftClosed } from './draft-closed.js';
 import { EntryView, ListView, WideView } from './editor-views.js';
 import { SubmitDialog } from './submit-dialog.js';
@@ -44,6 +45,7 @@ interface DraftEditorProps {
 function DraftEditor({ calendar, isOfficer, lockedAction }: DraftEditorProps) {
   const { t } = useTranslation('calendars');
   const editor = useEditor(calendar, isOfficer);
+  useWantedMarker(editor);
   const saving = useSaveEntry(editor);
   const actions = useEntryActions(editor);
   const form = useFormState(editor, saving.problems);

@@ -4,12 +4,14 @@ import { useTranslation } from 'react-i18next';
 import { PHENOMENA } from '#shared/sky/vocabulary.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { markerName } from '#src/lib/marker-names.js';
-import { Button } from '#src/ui/button.js';
+import { paths } from '#src/lib/paths.js';
+import { Button, ButtonLink } from '#src/ui/button.js';
 import { FieldNotes } from '#src/ui/field.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { PhenomenonIcon } from '#src/ui/icons/phenomenon-icon.js';
 import { PickGroup } from '#src/ui/pick.js';
-import { leadingRow, type FormState } from '../model/form-state.js';
+import { dateOfDayNumber } from '#src/lib/days.js';
+import { leadDayNumber, leadingRow, type FormState } from '../model/form-state.js';
 
 /** The star or figure that leads, and which of its four days. Each choice shows the day that it brings. */
 export function MarkerFields({ form, onSearch }: { form: FormState; onSearch: () => void }) {
@@ -44,6 +46,9 @@ export function MarkerFields({ form, onSearch }: { form: FormState; onSearch: ()
           </Button>
         </div>
         <FieldNotes inputId={labelId} problem={problem} />
+        <ButtonLink look="quiet" className="-ms-2" to={finderPath(form)}>
+          {t('form.findMarker')}
+        </ButtonLink>
       </div>
       {row && (
         <PickGroup
@@ -78,4 +83,19 @@ export function MarkerFields({ form, onSearch }: { form: FormState; onSearch: ()
       )}
     </div>
   );
+}
+
+/** The finder asks for the day that the entry has now, and leads back to it. */
+function finderPath(form: FormState): string {
+  const { calendarId, entryId, placeId, year } = form;
+  const lead = leadDayNumber(form);
+  const day = lead === null ? null : dateOfDayNumber(lead);
+  const two = (value: number) => String(value).padStart(2, '0');
+  return paths.finder({
+    placeId,
+    year,
+    calendar: calendarId,
+    entry: entryId,
+    ...(day === null ? {} : { from: `${two(day.month)}-${two(day.day)}` }),
+  });
 }

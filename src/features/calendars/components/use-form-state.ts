@@ -17,6 +17,9 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
   );
   if (selected === null || draft === null) return null;
   return {
+    calendarId: calendar.id,
+    entryId: selected.id,
+    placeId: calendar.placeId,
     draft,
     content: selected.content,
     dates: selected.dates,

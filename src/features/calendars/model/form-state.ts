@@ -9,6 +9,9 @@ import type { DraftChange } from './use-entry-edits.js';
 
 /** What the groups of the entry's form share. */
 export interface FormState {
+  calendarId: string;
+  entryId: string;
+  placeId: string;
   draft: EntryDraft;
   content: EntryInput;
   dates: EntryDates | null;

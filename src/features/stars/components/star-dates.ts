@@ -3,7 +3,7 @@ import { useTranslation } from 'react-i18next';
 import type { CivilDay } from '#shared/contracts/stars.js';
 import { useDateWords, type DayForm } from '#src/lib/date-words.js';
 import { dayNumberOf } from '#src/lib/days.js';
-import { civilDate, dateWithin, monthStarts } from '../model/civil-year.js';
+import { civilDate, dateWithin, monthStarts } from '#src/lib/civil-year.js';
 import type { ScaleMonth } from '#src/ui/pictures/month-scale.js';
 
 /** An expected day with the ends of its range; an end may be missing. */

@@ -16,7 +16,7 @@ import { Mast, Page, ThumbBar } from '#src/ui/page.js';
 import { Board, Care } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { starQuery } from '../api/stars-queries.js';
-import { isJulian, readYear } from '../model/civil-year.js';
+import { isJulian, readYear } from '#src/lib/civil-year.js';
 import { phenomenonToTie } from '../model/tie.js';
 import { BasisBoard } from './basis-board.js';
 import { FourDays } from './four-days.js';
@@ -24,6 +24,7 @@ import { NoPlace } from './no-place.js';
 import { OldData } from './old-data.js';
 import { useStarDates } from './star-dates.js';
 import { useStarNaming } from './star-names.js';
+import { StarWays } from './star-ways.js';
 import { YearBoard } from './year-board.js';
 import { YearStepper } from './year-stepper.js';
 
@@ -148,7 +149,10 @@ function StarScreen({ star, place, list, isLate, notice, yearStepper }: StarScre
           <div className="wide:col-start-1 wide:row-span-2 wide:row-start-1">
             <FourDays star={star} dates={dates} place={place} mayTie={mayTie} />
           </div>
-          <BasisBoard star={star} dates={dates} placeId={place.id} />
+          <div className="grid gap-4">
+            <StarWays markerKey={star.markerKey} placeId={place.id} year={star.year} />
+            <BasisBoard star={star} dates={dates} placeId={place.id} />
+          </div>
         </div>
       </div>
     </Page>

@@ -16,7 +16,7 @@ import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { starTableQuery } from '../api/stars-queries.js';
-import { isJulian } from '../model/civil-year.js';
+import { isJulian } from '#src/lib/civil-year.js';
 import { chooseRows, isGoodMarker } from '../model/star-choice.js';
 import { ROWS_STEP, type SortKey } from '../model/star-list-query.js';
 import type { StarRow } from '../model/star-rows.js';

@@ -1,9 +1,10 @@
-import { Download, Search, X } from 'lucide-react';
+import { CalendarSearch, Download, Search, X } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import type { Place } from '#shared/contracts/places.js';
 import { starsEndpoints } from '#shared/contracts/stars.js';
 import { apiUrl } from '#src/lib/api-client.js';
-import { ButtonAnchor } from '#src/ui/button.js';
+import { paths } from '#src/lib/paths.js';
+import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { Fold } from '#src/ui/fold.js';
 import { PickGroup } from '#src/ui/pick.js';
@@ -74,6 +75,16 @@ export function StarsToolbar(props: StarsToolbarProps) {
           }}
         />
         {hasHeads && csv}
+      </div>
+      <div>
+        <ButtonLink
+          look="quiet"
+          className="-ms-2"
+          to={paths.finder({ placeId: place.id, year: query.year })}
+          icon={<CalendarSearch aria-hidden size={22} />}
+        >
+          {t('finder')}
+        </ButtonLink>
       </div>
       {!hasHeads && (
         <Fold title={t('orderAndChoice')} line={<ChoiceLine {...props} />}>

@@ -1,5 +1,5 @@
 import { DOES, type Does, type StarChoice } from './star-choice.js';
-import { readYear } from './civil-year.js';
+import { readYear } from '#src/lib/civil-year.js';
 
 export const SORT_KEYS = [
   'name',

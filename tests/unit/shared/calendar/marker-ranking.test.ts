@@ -110,6 +110,17 @@ describe('the order of markers', () => {
     expect(easeOf({ vMag: 2.9, isFigure: false })).toBe('hard');
   });
 
+  it('puts a return or a last sight before a last rising or a first setting of the same sharpness', () => {
+    expect(
+      order([
+        candidate('last-rising', { phenomenon: 'acronychal-rising', vMag: 0 }),
+        candidate('first-setting', { phenomenon: 'cosmical-setting', vMag: 0 }),
+        candidate('last-sight', { phenomenon: 'heliacal-setting', vMag: 2 }),
+        candidate('return', { vMag: 1 }),
+      ]),
+    ).toEqual(['return', 'last-sight', 'first-setting', 'last-rising']);
+  });
+
   it('puts the star that clears a hill before the one that must be caught low', () => {
     expect(order([candidate('low'), candidate('high', { altitudeDeg: 6 })])).toEqual(['high', 'low']);
   });

@@ -1,6 +1,6 @@
 import type { CivilDay } from '#shared/contracts/stars.js';
 import { FIRST_YEAR, LAST_YEAR } from '#shared/sky/vocabulary.js';
-import { readDate, type PlainDate } from '#src/lib/days.js';
+import { readDate, type PlainDate } from './days.js';
 
 /** From this year on civil dates are Gregorian; before it the Julian calendar is meant. */
 export const FIRST_GREGORIAN_YEAR = 1583;

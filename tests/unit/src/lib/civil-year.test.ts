@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { dayNumberOf } from '#shared/sky/index.js';
-import { civilDate, dateWithin, monthStarts, readYear } from '#src/features/stars/model/civil-year.js';
+import { civilDate, dateWithin, monthStarts, readYear } from '#src/lib/civil-year.js';
 
 describe('a typed year', () => {
   it.each([

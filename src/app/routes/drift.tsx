@@ -1,0 +1,1 @@
+export { DriftPage as Component } from '#src/features/drift/components/drift-page.js';

@@ -1,0 +1,1 @@
+export { FinderPage as Component } from '#src/features/finder/components/finder-page.js';
