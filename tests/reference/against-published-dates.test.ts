@@ -36,15 +36,15 @@ function differenceDays(row: (typeof rows)[number]): number {
   return differences.reduce((least, one) => (Math.abs(one) < Math.abs(least) ? one : least), Infinity);
 }
 
-describe('26 dates from the literature', () => {
-  it('are all read', () => expect(rows).toHaveLength(26));
+describe('dates from the literature', () => {
+  it('are all read', () => expect(rows).toHaveLength(30));
 
   it.each(rows)('$id $star, $phenomenon: within $toleranceDays d of [$source]', (row) => {
     expect(Math.abs(differenceDays(row))).toBeLessThanOrEqual(row.toleranceDays);
   });
 
-  it('scatter as an independent implementation found: mean −0.5 d, standard deviation 1.0 d', () => {
-    const differences = rows.map(differenceDays);
+  it('scatter as an independent implementation found for the first 26: mean −0.5 d, standard deviation 1.0 d', () => {
+    const differences = rows.slice(0, 26).map(differenceDays);
     const mean = differences.reduce((sum, one) => sum + one, 0) / differences.length;
     const variance = differences.reduce((sum, one) => sum + (one - mean) ** 2, 0) / differences.length;
     // Half a day either way: the rounding to whole days of 26 dates moves the mean by less.

@@ -11,6 +11,7 @@ import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
 
 const SIRIUS = 2491;
 const ARCTURUS = 5340;
+const SPICA = 5056;
 const CANOPUS = 2326;
 
 function dayOf(
@@ -46,6 +47,21 @@ describe('published statements that are not the date of one star', () => {
           .occurrences[0]?.expected.dayNumber ?? Number.NaN,
     );
     expect(Math.abs((arcturus ?? 0) - (sirius ?? 0) - 60)).toBeLessThanOrEqual(7);
+  });
+
+  it('10 days from the rising of Arcturus to that of Spica at Babylon in −1000 [MUL.APIN I iii], ±5 d', () => {
+    // The list counts in steps of five days.
+    const place = { latitudeDeg: 32.5, longitudeDeg: 44.4, year: -1000, avDeg: 11 };
+    const days = dayOf(SPICA, 'heliacal-rising', place) - dayOf(ARCTURUS, 'heliacal-rising', place);
+    expect(Math.abs(days - 10)).toBeLessThanOrEqual(5);
+  });
+
+  it('the Belt of Orion never disappears at 44° S: in June it is seen at dusk and at dawn [A. Gilmore, Matariki Dunedin]', () => {
+    const belt = computeMarkerYear('orion-belt', siteAt(-44, 170.5), settingsWith({}), 2020);
+    expect(belt.notes).toContain('never-disappears');
+    for (const phenomenon of ['heliacal-rising', 'heliacal-setting'] as const) {
+      expect(belt.phenomena[phenomenon].occurrences[0]?.expected.gregorian.month).toBe(6);
+    }
   });
 
   it('Canopus never rises north of about 37.3° N in 2000 [regional press on Suhail]', () => {
