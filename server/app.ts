@@ -19,6 +19,8 @@ import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
 import { healthRoutes } from './features/health/health.routes.js';
 import { HealthService } from './features/health/health.service.js';
+import { moonsRoutes } from './features/moons/moons.routes.js';
+import { MoonsService } from './features/moons/moons.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
 import { SigningService } from './features/reviews/signing.service.js';
@@ -115,6 +117,7 @@ export function createApp(options: AppOptions): App {
   const stars = new StarsService(places, skyYears);
   placesRoutes(mount, places);
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
+  moonsRoutes(mount, new MoonsService(places, skyYears));
 
   finderRoutes(mount, new FinderService(places));
   driftRoutes(mount, new DriftService(places));

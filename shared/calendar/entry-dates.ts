@@ -156,7 +156,8 @@ export function occurrenceDaysOf(occurrence: Occurrence): OccurrenceDays {
   };
 }
 
-function labelled({ dayNumber, gregorian, julian }: CivilDay): LabelledDay {
+/** A civil day with its labels as text. */
+export function labelled({ dayNumber, gregorian, julian }: CivilDay): LabelledDay {
   return { dayNumber, gregorian: labelOf(gregorian), julian: labelOf(julian) };
 }
 

@@ -4,6 +4,7 @@ import { calendarsEndpoints } from './calendars.js';
 import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { healthEndpoints } from './health.js';
+import { moonsEndpoints } from './moons.js';
 import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
 import { reviewsEndpoints } from './reviews.js';
@@ -22,6 +23,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   starsEndpoints,
   finderEndpoints,
   driftEndpoints,
+  moonsEndpoints,
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

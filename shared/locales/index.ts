@@ -4,6 +4,7 @@ import { texts as common } from './en/common.js';
 import { texts as drift } from './en/drift.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
+import { texts as moons } from './en/moons.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
@@ -29,6 +30,7 @@ export const en = {
   stars,
   finder,
   drift,
+  moons,
   calendars,
   reviews,
   sheets,

@@ -27,6 +27,7 @@ export const personRoutes: readonly AppRoute[] = [
 export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.today, texts: ['today', 'sky'], load: () => import('./routes/today.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
+  { path: PATTERNS.moons, texts: ['moons', 'sky'], load: () => import('./routes/moons.js') },
   { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
   { path: PATTERNS.drift, texts: ['drift', 'sky'], load: () => import('./routes/drift.js') },
   { path: PATTERNS.finder, texts: ['finder', 'sky'], load: () => import('./routes/finder.js') },

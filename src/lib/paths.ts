@@ -5,6 +5,7 @@ export const PATTERNS = {
   welcome: '/welcome',
   account: '/account',
   stars: '/stars',
+  moons: '/stars/moons',
   star: '/stars/:markerKey',
   drift: '/stars/:markerKey/drift',
   finder: '/finder',
@@ -54,6 +55,7 @@ export const paths = {
     code === undefined ? PATTERNS.welcome : `${PATTERNS.welcome}#code=${encodeURIComponent(code)}`,
   account: () => PATTERNS.account,
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
+  moons: (query: { year?: number } = {}) => withQuery(PATTERNS.moons, query),
   star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>
     withQuery(`/stars/${encodeURIComponent(markerKey)}`, query),
   /** How a marker moved through the centuries; `year` is the one on screen. */

@@ -2,7 +2,7 @@ import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { CrossingDetail, MarkerRow, OccurrenceDetail, PhenomenonDays } from '#shared/contracts/stars.js';
 import { compassPoint, PHENOMENA } from '#shared/sky/index.js';
 import type { Crossing, Occurrence, Phenomenon, PhenomenonResult } from '#shared/sky/index.js';
-import { localTimeOf, type PlaceClock } from './local-time.js';
+import { localTimeOf, type PlaceClock } from './local-time.service.js';
 import { markerNamesOf } from './marker-names.service.js';
 import type { MarkerNights } from './sky-years.service.js';
 

@@ -94,6 +94,7 @@ export const texts = {
     'not-before-year': 'Give a year before the one that is asked for.',
     'span-too-long': 'Wanted days span at most three months.',
     'too-many': 'These are too many at a time.',
+    'moon-month': 'Give a month from 1 to 12.',
     'marker-key': 'This is no marker. Choose one from the list of stars.',
     'unknown-marker': 'This star or figure is not in the table. Choose one from the list.',
     'offset-range': 'Days count from −366 to 366.',

@@ -62,6 +62,7 @@ export const texts = {
     'Days before dawn belong to the morning of that date, days at dusk to its evening. Under each stands the range that holds in about eight seasons of ten.',
   julian: 'Dates before 1583 are those of the Julian calendar, which was in use then.',
   trouble: 'The stars could not be computed',
+  toMoons: 'Moons and Venus of this year',
 
   group: 'a group of stars',
   hr: 'HR {{hr}}',

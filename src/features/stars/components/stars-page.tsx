@@ -1,5 +1,6 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import { useTable } from '@tanstack/react-table';
+import { Moon } from 'lucide-react';
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
@@ -10,8 +11,9 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { todayIn } from '#src/lib/days.js';
 import { FROM_MID, useMediaQuery } from '#src/lib/media-query.js';
 import { usePageTitle } from '#src/lib/page-title.js';
+import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
-import { Button } from '#src/ui/button.js';
+import { Button, ButtonLink } from '#src/ui/button.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
@@ -117,6 +119,11 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
         hasHeads={isMid}
         onPlace={choosePlace}
       />
+      <p className="mb-3">
+        <ButtonLink look="quiet" to={paths.moons({ year: query.year })} icon={<Moon aria-hidden size={20} />}>
+          {t('toMoons')}
+        </ButtonLink>
+      </p>
       {error !== null && data !== undefined && <OldData updatedAt={dataUpdatedAt} refetch={refetch} />}
       {isJulian(query.year) && <p className="mb-3 text-small">{t('julian')}</p>}
       {data === undefined ? (

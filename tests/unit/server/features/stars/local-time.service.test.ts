@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { localTimeOf } from '#server/features/stars/local-time.js';
+import { localTimeOf } from '#server/features/stars/local-time.service.js';
 
 /** Julian Day of an instant: 1970-01-01T00:00Z is JD 2440587.5. */
 const jdOf = (iso: string) => Date.parse(iso) / 86_400_000 + 2_440_587.5;

@@ -1,0 +1,1 @@
+export { MoonsPage as Component } from '#src/features/moons/components/moons-page.js';
