@@ -32,11 +32,11 @@ export function FoundCard({ found, isBest }: { found: FoundMarker; isBest: boole
       <p className="text-part leading-tight">{words.day(found)}</p>
       <p className="mb-2">{words.range(found.days)}</p>
       <NearPicture found={found} />
-      <dl className="facts mt-2">
-        <Fact name={t('column.near')}>{words.near(found)}</Fact>
-        <Fact name={t('column.exact')}>{words.exact(found)}</Fact>
-        <Fact name={t('column.ease')}>{words.ease(found)}</Fact>
-      </dl>
+      <ul className="mt-2">
+        <li>{words.nearInFull(found)}</li>
+        <li>{words.exact(found)}</li>
+        <li>{words.ease(found)}</li>
+      </ul>
       {found.caution !== null && (
         <Care className="mt-3">
           <p>{t(`caution.${found.caution}`)}</p>

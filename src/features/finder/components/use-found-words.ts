@@ -20,6 +20,8 @@ export interface FoundWords {
   /** `between 3 and 12 June`; says so where an end is missing. */
   range: (days: OccurrenceDays) => string;
   near: (found: FoundMarker) => string;
+  /** The same where no heading says what it is near to: `1 day after your day`. */
+  nearInFull: (found: FoundMarker) => string;
   exact: (found: FoundMarker) => string;
   ease: (found: FoundMarker) => string;
   keeps: (found: FoundMarker) => string;
@@ -51,6 +53,10 @@ export function useFoundWords(isStretch: boolean): FoundWords {
       near: ({ daysAway }) => {
         if (daysAway === 0) return t(isStretch ? 'near.within' : 'near.same');
         return t(daysAway < 0 ? 'near.before' : 'near.after', { count: Math.abs(daysAway) });
+      },
+      nearInFull: ({ daysAway }) => {
+        if (daysAway === 0) return t(isStretch ? 'nearInFull.within' : 'nearInFull.same');
+        return t(daysAway < 0 ? 'nearInFull.before' : 'nearInFull.after', { count: Math.abs(daysAway) });
       },
       exact: ({ exactness, rangeDays }) =>
         t(`exact.${exactness}`, { days: t('common:days', { count: rangeDays ?? 0 }) }),

@@ -239,6 +239,43 @@ describe('a locked draft', () => {
   });
 });
 
+describe('a sign that was looked up for an entry', () => {
+  const chosen = () =>
+    screen.getByText('Goes by', { selector: 'p' }).closest('[role="group"]')?.textContent ?? '';
+
+  it('stands in the entry that asked for it, once, and what is chosen afterwards stands', async () => {
+    const saved = draft({});
+    answerWith(server(saved));
+    const id = saved.entries[0]?.id ?? '';
+    const { user, address } = await open(`?entry=${id}&marker=hr2491&phenomenon=heliacal-setting`);
+    await waitFor(() => {
+      expect(chosen()).toContain('Sirius');
+      expect(address()).toBe(`/calendars/${CALENDAR.id}?entry=${id}`);
+    });
+    expect(screen.getByRole<HTMLInputElement>('radio', { name: /Last evening seen/ }).checked).toBe(true);
+    expect(screen.getAllByText('not saved yet').length).toBeGreaterThan(0);
+    await user.click(screen.getByRole('radio', { name: /First morning seen/ }));
+    expect(screen.getByRole<HTMLInputElement>('radio', { name: /First morning seen/ }).checked).toBe(true);
+  });
+
+  it('can be looked for from the entry’s day, and the way leads back to this entry', async () => {
+    const saved = draft({});
+    answerWith(server(saved));
+    await open(`?entry=${saved.entries[0]?.id ?? ''}`);
+    await days('Best from');
+    const link = await screen.findByRole('link', { name: 'Which sign falls near a day?' });
+    const expected = saved.entries[0]?.dates.marker?.expected.gregorian.slice(5) ?? '';
+    const asked = new URL(link.getAttribute('href') ?? '', 'http://board.example').searchParams;
+    expect(Object.fromEntries(asked)).toEqual({
+      placeId: CALENDAR.placeId,
+      year: String(YEAR),
+      calendar: CALENDAR.id,
+      entry: saved.entries[0]?.id,
+      from: expected,
+    });
+  });
+});
+
 describe('the draft for others', () => {
   it('is read by an elder and closed to an observer', async () => {
     answerWith(server(draft({})));
