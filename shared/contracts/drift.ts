@@ -9,7 +9,12 @@ import { basis, engineYear, markerKey, markerNames, occurrenceDays, phenomenon }
 export const DRIFT_EPOCHS_MAX = 101;
 
 export const driftQuery = z
-  .strictObject({ from: engineYear, to: engineYear })
+  .strictObject({
+    from: engineYear,
+    to: engineYear,
+    /** One more year between them, such as the year on screen. */
+    year: engineYear.optional(),
+  })
   .refine(({ from, to }) => from < to, { path: ['to'], error: 'year-order' });
 export type DriftQuery = z.infer<typeof driftQuery>;
 

@@ -27,8 +27,8 @@ export class DriftService {
   }
 }
 
-function driftAt(place: WatchedPlace, markerKey: string, { from, to }: DriftQuery): DriftAnswer {
+function driftAt(place: WatchedPlace, markerKey: string, { from, to, year }: DriftQuery): DriftAnswer {
   if (resolveMarker(markerKey) === null) throw notFound();
-  const drift = driftOf(markerKey, siteOf(place), settingsOf(place), driftYears(from, to));
+  const drift = driftOf(markerKey, siteOf(place), settingsOf(place), driftYears(from, to, year ?? null));
   return toDriftAnswer(drift, from, to);
 }

@@ -20,9 +20,16 @@ export const texts = {
     label:
       '{{star}}, {{phenomenon}}, from {{from}} to {{to}}: {{first}} in {{firstYear}}, {{last}} in {{lastYear}}. {{pace}}',
     labelNone: '{{star}}, {{phenomenon}}, from {{from}} to {{to}}: no such day in any of these years.',
-    read: 'Earlier days stand above, later days below, in today’s calendar. The line is the expected day, the band its range.',
+    read: 'Earlier days stand above, later days below, in today’s calendar. The line is the expected day, the band its range; leap days, which push single dates by up to a day, are smoothed out.',
     peg: 'The peg stands at {{year}}: about {{day}}.',
     none: 'It has no such day here in any of these years.',
+    why: {
+      'never-sets': 'It never sets, so it is never lost and never comes back.',
+      'never-rises': 'It never rises.',
+      'below-skyline': 'It stays below the skyline.',
+      'never-clears-skyline': 'It stays below the skyline.',
+      'never-dark-enough': 'The sky is never dark enough for it at that time of year.',
+    },
   },
   pace: {
     later: 'It moves later by about {{days}} days in a century.',

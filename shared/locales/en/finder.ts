@@ -158,6 +158,7 @@ export const texts = {
     'Rings are days. Bracket: when the sign shows, with a point at the expected day. Diamond or bar: your days.',
 
   none: {
+    titleAll: 'No star serves here near {{days}}',
     title: 'No easy star serves here near {{days}}',
     sunUp: 'Around that time the Sun does not go down: there is no night to see stars in.',
     light: 'Around that time the nights stay light: the Sun sinks only {{depth}}° below the horizon at most.',

@@ -15,6 +15,9 @@ import { DriftTable } from './drift-table.js';
 import { DriftTurns } from './drift-turns.js';
 import { usePaceWords } from './use-pace-words.js';
 
+/** Names of days and months are those of any year. */
+const PLAIN_YEAR = 2027;
+
 export interface DriftBoardProps {
   drift: DriftAnswer;
   star: string;
@@ -41,8 +44,9 @@ export function DriftBoard(props: DriftBoardProps) {
   };
   const points = runs.flat();
   const [first, last] = [points[0], points.at(-1)];
-  const dayOf = (point: DriftPoint) => dates.day(plainDate(point.expected));
-  const inUse = placeAt(runs, yearInUse);
+  const dayOf = (point: DriftPoint) => dates.day({ ...point.date, year: PLAIN_YEAR });
+  const why = whyNever(drift.epochs, phenomenon);
+  const inUse = points.find(({ year }) => year === yearInUse) ?? null;
   return (
     <Board
       title={t('picture.title')}
@@ -78,13 +82,14 @@ export function DriftBoard(props: DriftBoardProps) {
           />
           <p className="mt-2">
             <strong>{pace}</strong>{' '}
-            {inUse !== null &&
-              t('picture.peg', { year: dates.year(yearInUse), day: dates.day(plainDate(inUse)) })}
+            {inUse !== null && t('picture.peg', { year: dates.year(yearInUse), day: dayOf(inUse) })}
           </p>
           <p className="text-small text-umber-soft">{t('picture.read')}</p>
         </>
       ) : (
-        <p className="text-lead">{t('picture.none')}</p>
+        <p className="text-lead">
+          {t('picture.none')} {why !== null && t(`picture.why.${why}`)}
+        </p>
       )}
       <DriftTurns turns={drift.turns.filter((turn) => turn.phenomenon === phenomenon)} />
       <More label={t('common:showAsTable')} icon={<Table2 aria-hidden size={20} />}>
@@ -96,12 +101,12 @@ export function DriftBoard(props: DriftBoardProps) {
 
 interface PictureProps extends DriftBoardProps {
   runs: readonly (readonly DriftPoint[])[];
-  inUse: number | null;
+  inUse: DriftPoint | null;
   isWide: boolean;
   label: string;
 }
 
-function Picture({ drift, phenomenon, yearInUse, runs, inUse, isWide, label }: PictureProps) {
+function Picture({ drift, phenomenon, runs, inUse, isWide, label }: PictureProps) {
   const dates = useDateWords();
   const scale = driftScale(runs, drift, isWide ? 8 : 4);
   const x = (year: number) => ((year - scale.fromYear) / (scale.toYear - scale.fromYear)) * 100;
@@ -121,19 +126,17 @@ function Picture({ drift, phenomenon, yearInUse, runs, inUse, isWide, label }: P
       height={isWide ? 320 : 240}
       across={scale.days.map((day) => ({ at: y(day), words: dates.day(plainDate(day), 'short') }))}
       down={scale.years.map((year) => ({ at: x(year), words: dates.year(year) }))}
-      peg={inUse === null ? null : { x: x(yearInUse), y: y(inUse) }}
+      peg={inUse && { x: x(inUse.year), y: y(inUse.expected) }}
     />
   );
 }
 
-/** The line's place at a year, between the two points beside it; null outside its runs. */
-function placeAt(runs: readonly (readonly DriftPoint[])[], year: number): number | null {
-  for (const run of runs) {
-    const next = run.findIndex((point) => point.year >= year);
-    const [left, right] = [run[next - 1], run[next]];
-    if (right?.year === year) return right.expected;
-    if (!left || !right) continue;
-    return left.expected + ((year - left.year) / (right.year - left.year)) * (right.expected - left.expected);
-  }
-  return null;
+/** The one reason why no year has the day; null where the reasons differ. */
+function whyNever(epochs: DriftAnswer['epochs'], phenomenon: Phenomenon) {
+  const reasons = epochs.map(({ outcome, outcomeDetail, phenomena }) =>
+    outcome === 'rises-and-sets' ? phenomena[phenomenon].outcome : (outcomeDetail ?? outcome),
+  );
+  const [first] = reasons;
+  if (first === undefined || first === 'dated' || first === 'none-in-this-year') return null;
+  return reasons.every((reason) => reason === first) ? first : null;
 }

@@ -50,13 +50,13 @@ function DriftAtPlace({ place, markerKey }: { place: Place; markerKey: string })
   const dates = useDateWords();
   const [search, setSearch] = useSearchParams();
   const view = readView(search);
+  const yearInUse = readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year;
   const settled = useSettled(`${String(view.from)} ${String(view.to)}`, PAUSE_MS);
   const [from = view.from, to = view.to] = settled.split(' ').map(Number);
   const { data, error, refetch, isPlaceholderData } = useQuery({
-    ...driftQuery(place.id, markerKey, from, to),
+    ...driftQuery(place.id, markerKey, from, to, yearInUse),
     placeholderData: keepPreviousData,
   });
-  const yearInUse = readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year;
   const star = data ? markerName(data) : null;
   const title = star === null ? t('titlePlain') : t('title', { star });
   usePageTitle(title);

@@ -2,7 +2,6 @@ import { useTranslation } from 'react-i18next';
 import type { DriftDay, DriftEpoch } from '#shared/contracts/drift.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { Table } from '#src/ui/table.js';
-import { pointOf, plainDate } from '../model/drift-line.js';
 import { useJulianWords } from './use-julian-words.js';
 import type { DriftBoardProps } from './drift-board.js';
 
@@ -31,7 +30,7 @@ export function DriftTable({ drift, phenomenon, yearInUse, caption }: DriftBoard
                 {day === undefined ? (
                   <td colSpan={3}>{t(`table.noDay.${whyNoDay(epoch, phenomenon)}`)}</td>
                 ) : (
-                  <DayCells year={epoch.year} day={day} />
+                  <DayCells day={day} />
                 )}
               </tr>
             );
@@ -43,11 +42,10 @@ export function DriftTable({ drift, phenomenon, yearInUse, caption }: DriftBoard
   );
 }
 
-function DayCells({ year, day }: { year: number; day: DriftDay }) {
+function DayCells({ day }: { day: DriftDay }) {
   const { i18n } = useTranslation('drift');
   const dates = useDateWords();
   const julian = useJulianWords();
-  const point = pointOf(year, day, null);
   const degrees = new Intl.NumberFormat(i18n.language, {
     maximumFractionDigits: 1,
     minimumFractionDigits: 1,
@@ -55,11 +53,9 @@ function DayCells({ year, day }: { year: number; day: DriftDay }) {
   return (
     <>
       <td>
-        {dates.day(plainDate(point.expected))}
-        {point.early !== null && point.late !== null && (
-          <span className="range-line">
-            {dates.range(plainDate(point.early), plainDate(point.late), 'short')}
-          </span>
+        {dates.day(day.expected.gregorian)}
+        {day.early !== null && day.late !== null && (
+          <span className="range-line">{dates.range(day.early.gregorian, day.late.gregorian, 'short')}</span>
         )}
       </td>
       <td>{julian(day.expected.julian)}</td>

@@ -3,11 +3,14 @@ import type { Phenomenon } from '#shared/sky/vocabulary.js';
 import { dateOfDayNumber, dayNumberOf, readDate, type PlainDate } from '#src/lib/days.js';
 
 /**
- * A day of one year as a place in the seasons: days since 1 January of a plain year. It goes on beyond 0 and 365 where
- * a marker slips over New Year, so that its line never jumps.
+ * A day of one year as a place in the seasons: days since 1 January in the mean of the Gregorian calendar, whose leap days
+ * push single dates to and fro by up to a day. It goes on beyond 0 and 365 where a marker slips over New Year, so
+ * that its line never jumps.
  */
 export interface DriftPoint {
   year: number;
+  /** The date itself, as it is told in words. */
+  date: PlainDate;
   early: number | null;
   expected: number;
   late: number | null;
@@ -17,6 +20,10 @@ export interface DriftPoint {
 const PLAIN_YEAR = 2027;
 const PLAIN_YEAR_DAYS = 365;
 const FIRST_DAY = dayNumberOf({ year: PLAIN_YEAR, month: 1, day: 1 });
+/** Mean length of the Gregorian year. */
+const GREGORIAN_YEAR_DAYS = 365.2425;
+/** Where 1 January of the year 2000 would stand without leap days: the mean of the four centuries round it. */
+const MEAN_NEW_YEAR = meanNewYear();
 
 /** The dated years of a phenomenon in runs: a run ends where a year has no date. */
 export function driftRuns(epochs: readonly DriftEpoch[], phenomenon: Phenomenon): DriftPoint[][] {
@@ -43,26 +50,22 @@ export function driftRuns(epochs: readonly DriftEpoch[], phenomenon: Phenomenon)
 }
 
 /** A day's place in the seasons, within half a year of the point before it. */
-export function pointOf(year: number, day: DriftDay, before: DriftPoint | null): DriftPoint {
+function pointOf(year: number, day: DriftDay, before: DriftPoint | null): DriftPoint {
   const date = readDate(day.expected.gregorian);
   if (date === null) throw new TypeError(`Not a date: ${day.expected.gregorian}`);
-  const inYear = dayNumberOf({ ...plainDay(date), year: PLAIN_YEAR }) - FIRST_DAY;
-  const turns = before === null ? 0 : Math.round((before.expected - inYear) / PLAIN_YEAR_DAYS);
-  const expected = inYear + turns * PLAIN_YEAR_DAYS;
+  const sinceMeanNewYear = day.expected.dayNumber - MEAN_NEW_YEAR;
+  const about = before?.expected ?? GREGORIAN_YEAR_DAYS / 2;
+  const expected =
+    sinceMeanNewYear - Math.round((sinceMeanNewYear - about) / GREGORIAN_YEAR_DAYS) * GREGORIAN_YEAR_DAYS;
   const beside = (end: { dayNumber: number } | null) =>
     end && expected + end.dayNumber - day.expected.dayNumber;
-  return { year, early: beside(day.early), expected, late: beside(day.late) };
+  return { year, date, early: beside(day.early), expected, late: beside(day.late) };
 }
 
 /** The date that a place in the seasons has in a plain year. */
 export function plainDate(season: number): PlainDate {
   const inYear = ((Math.round(season) % PLAIN_YEAR_DAYS) + PLAIN_YEAR_DAYS) % PLAIN_YEAR_DAYS;
   return dateOfDayNumber(FIRST_DAY + inYear);
-}
-
-/** 29 February has no place in a plain year. */
-function plainDay({ month, day }: PlainDate): { month: number; day: number } {
-  return { month, day: month === 2 ? Math.min(day, 28) : day };
 }
 
 export interface DriftScale {
@@ -109,4 +112,12 @@ function dayLines(top: number, bottom: number): number[] {
   const firsts = within(({ day }) => day === 1);
   if (firsts.length > MOST_DAY_LINES) return within(({ day, month }) => day === 1 && month % 2 === 1);
   return firsts.length >= 3 ? firsts : within(({ day }) => day === 1 || day === 11 || day === 21);
+}
+
+function meanNewYear(): number {
+  let sum = 0;
+  for (let year = 1800; year < 2200; year += 1) {
+    sum += dayNumberOf({ year, month: 1, day: 1 }) - (year - 2000) * GREGORIAN_YEAR_DAYS;
+  }
+  return sum / 400;
 }

@@ -17,11 +17,14 @@ interface FinderAnswerViewProps {
   place: Place;
   takePath: FinderFacts['takePath'];
   isForEntry: boolean;
+  /** True where faint stars were looked through too. */
+  isAll: boolean;
   onShowAll: () => void;
 }
 
 /** What was found: the old sign's way, the signs in their order, what to do where there are none. */
-export function FinderAnswerView({ answer, place, takePath, isForEntry, onShowAll }: FinderAnswerViewProps) {
+export function FinderAnswerView(props: FinderAnswerViewProps) {
+  const { answer, place, takePath, isForEntry, isAll, onShowAll } = props;
   const { t } = useTranslation('finder');
   const isWide = useWideScreen();
   const { wanted, old } = answer;
@@ -52,7 +55,7 @@ export function FinderAnswerView({ answer, place, takePath, isForEntry, onShowAl
               </p>
             )}
           </div>
-          {good.length === 0 && <NoMarker onShowAll={onShowAll} />}
+          {good.length === 0 && <NoMarker isAll={isAll} onShowAll={onShowAll} />}
           {isWide ? (
             answer.items.length > 0 && <FoundTable items={[...good, ...careful]} />
           ) : (

@@ -100,6 +100,7 @@ function FinderAtPlace({ place }: { place: Place }) {
               place={place}
               takePath={takePath}
               isForEntry={forEntry !== null}
+              isAll={question.show === 'all'}
               onShowAll={() => {
                 change({ show: 'all' });
               }}

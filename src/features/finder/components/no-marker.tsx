@@ -11,7 +11,7 @@ import { useFinderFacts } from './finder-context.js';
 const LIGHT_NIGHT_DEG = 12;
 
 /** Why nothing near the wanted days can be gone by, and what can: another season, the Sun, the land, a date. */
-export function NoMarker({ onShowAll }: { onShowAll: () => void }) {
+export function NoMarker({ isAll, onShowAll }: { isAll: boolean; onShowAll: () => void }) {
   const { t, i18n } = useTranslation('finder');
   const { answer, words, wanted } = useFinderFacts();
   const { darkestDeg, without, nearest } = answer;
@@ -22,7 +22,7 @@ export function NoMarker({ onShowAll }: { onShowAll: () => void }) {
   ].filter((reason) => reason !== false);
   const depth = new Intl.NumberFormat(i18n.language, { maximumFractionDigits: 0 });
   return (
-    <Board title={t('none.title', { days: words.wanted(wanted) })}>
+    <Board title={t(isAll ? 'none.titleAll' : 'none.title', { days: words.wanted(wanted) })}>
       {darkestDeg !== null && darkestDeg < LIGHT_NIGHT_DEG && (
         <p>
           {darkestDeg <= 0
@@ -41,9 +41,11 @@ export function NoMarker({ onShowAll }: { onShowAll: () => void }) {
         <li>{t('none.land')}</li>
         <li>{t('none.fixed')}</li>
       </ul>
-      <Button className="mt-3" onClick={onShowAll}>
-        {t('none.tryAll')}
-      </Button>
+      {!isAll && (
+        <Button className="mt-3" onClick={onShowAll}>
+          {t('none.tryAll')}
+        </Button>
+      )}
     </Board>
   );
 }

@@ -7,6 +7,12 @@ describe('the years of a drift', () => {
     expect(driftYears(-7, 1000).slice(0, 3)).toEqual([-7, 0, 20]);
   });
 
+  it('hold one more year where it is wanted and lies between them', () => {
+    expect(driftYears(1000, 2100, 2027)).toContain(2027);
+    expect(driftYears(1000, 2100, 2027).length).toBeLessThanOrEqual(101);
+    expect(driftYears(1000, 2100, 2500)).not.toContain(2500);
+  });
+
   it('are never more than a hundred and one, for any stretch, and ascend', () => {
     for (const span of [1, 99, 100, 101, 480, 995, 1000, 2027, 4999, 6000]) {
       const years = driftYears(-3000, -3000 + span);

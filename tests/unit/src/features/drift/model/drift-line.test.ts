@@ -1,18 +1,20 @@
 import { describe, expect, it } from 'vitest';
 import type { DriftEpoch } from '#shared/contracts/drift.js';
+import { dayNumberOf, readDate } from '#src/lib/days.js';
 import { driftRuns, driftScale, plainDate } from '#src/features/drift/model/drift-line.js';
 
 const NONE = { outcome: 'never-dark-enough' as const, occurrences: [] };
 
 function epoch(year: number, gregorian: string | null, more: Partial<DriftEpoch> = {}): DriftEpoch {
-  const day = { dayNumber: 1000, gregorian: gregorian ?? '', julian: gregorian ?? '' };
+  const dayNumber = dayNumberOf(readDate(gregorian ?? '2000-01-01') ?? { year: 2000, month: 1, day: 1 });
+  const day = { dayNumber, gregorian: gregorian ?? '', julian: gregorian ?? '' };
   const rising = {
     outcome: 'dated' as const,
     occurrences: [
       {
         expected: day,
-        early: { ...day, dayNumber: 997 },
-        late: { ...day, dayNumber: 1005 },
+        early: { ...day, dayNumber: dayNumber - 3 },
+        late: { ...day, dayNumber: dayNumber + 5 },
         notes: [],
         sunLongitudeDeg: 0,
       },
@@ -33,16 +35,29 @@ function epoch(year: number, gregorian: string | null, more: Partial<DriftEpoch>
 }
 
 describe('the line of a marker', () => {
-  it('has each year’s place in the seasons, with its range beside it', () => {
+  it('has each year’s date, and its place in the seasons with the range beside it', () => {
     const [run] = driftRuns([epoch(1000, '1000-05-20'), epoch(2000, '2000-06-03')], 'heliacal-rising');
-    expect(run?.map(({ expected }) => plainDate(expected))).toMatchObject([
-      { month: 5, day: 20 },
-      { month: 6, day: 3 },
+    expect(run?.map(({ date }) => [date.month, date.day])).toEqual([
+      [5, 20],
+      [6, 3],
     ]);
-    expect(run?.[0]).toMatchObject({
-      early: (run?.[0]?.expected ?? 0) - 3,
-      late: (run?.[0]?.expected ?? 0) + 5,
-    });
+    const [first] = run ?? [];
+    // 20 May is the day 139 after 1 January; leap days push a date by up to a day.
+    expect(Math.abs((first?.expected ?? 0) - 139)).toBeLessThan(1.3);
+    expect([
+      (first?.early ?? 0) - (first?.expected ?? 0),
+      (first?.late ?? 0) - (first?.expected ?? 0),
+    ]).toEqual([-3, 5]);
+  });
+
+  it('lies still for a day that keeps its date, whatever leap days do', () => {
+    const years = Array.from({ length: 60 }, (_, index) => 1500 + 10 * index);
+    const [run] = driftRuns(
+      years.map((year) => epoch(year, `${String(year)}-06-03`)),
+      'heliacal-rising',
+    );
+    const places = (run ?? []).map(({ expected }) => expected);
+    expect(Math.max(...places) - Math.min(...places)).toBeLessThan(2.3);
   });
 
   it('goes on over New Year without a jump', () => {
@@ -50,7 +65,10 @@ describe('the line of a marker', () => {
       [epoch(1000, '1000-12-20'), epoch(1500, '1500-12-29'), epoch(2000, '2000-01-06')],
       'heliacal-rising',
     );
-    expect(run?.map(({ expected }) => expected)).toEqual([353, 362, 370]);
+    const places = (run ?? []).map(({ expected }) => expected);
+    for (const [index, about] of [353, 362, 370].entries()) {
+      expect(Math.abs((places[index] ?? 0) - about)).toBeLessThan(1.3);
+    }
     expect(plainDate(370)).toMatchObject({ month: 1, day: 6 });
   });
 
