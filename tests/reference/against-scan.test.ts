@@ -4,11 +4,13 @@ import { describe, expect, it } from 'vitest';
 import {
   computeMarkerYear,
   depthAtCrossingYear,
+  findStar,
   markerKeyOf,
   type Phenomenon,
   PHENOMENA,
 } from '#shared/sky/index.js';
 import { civilYearOf } from '#shared/sky/time/civil-year.js';
+import { depthOnHillDeg, hillExcessDeg } from '#shared/sky/visibility/hill-allowance.js';
 import {
   anyHr,
   anyLatitudeDeg,
@@ -100,10 +102,16 @@ describe('the closed form and a plain scan over every crossing', () => {
   );
 
   it('agree by the altitude difference over skyline tables', { timeout: PROPERTY_TIMEOUT_MS }, () => {
-    // The rule as the design states it, written down once more.
-    const sameSideDeg = (thresholdDeg: number, altitudeDeg: number): number => {
+    // The rule written down once more, from the model's values over hills.
+    const oneThirdOrMore = (thresholdDeg: number, depthDeg: number): number =>
+      Math.max(thresholdDeg / 3, depthDeg);
+    const neededDeg = (side: 'same' | 'opposite', av: number, vMag: number, altitudeDeg: number): number => {
       const a = Math.max(0, altitudeDeg);
-      return Math.max(thresholdDeg / 3, thresholdDeg - a + 0.6 * Math.max(0, a - 5));
+      const change =
+        side === 'same'
+          ? hillExcessDeg(vMag, 'ordinary', a) - a
+          : Math.min(a, depthOnHillDeg(vMag, 'ordinary', a) - av);
+      return oneThirdOrMore(av, av + change);
     };
     fc.assert(
       fc.property(
@@ -121,10 +129,11 @@ describe('the closed form and a plain scan over every crossing', () => {
             longitudeDeg,
             year: civilYearOf(year),
             skyline,
-            neededDeg: (side, altitudeDeg) =>
-              side === 'same'
-                ? sameSideDeg(result.basis.sameSideDeg, altitudeDeg)
-                : result.basis.oppositeSideDeg,
+            neededDeg: (side, altitudeDeg) => {
+              const { sameSideDeg, oppositeSideDeg } = result.basis;
+              const vMag = findStar(hr)?.vMag ?? Number.NaN;
+              return neededDeg(side, side === 'same' ? sameSideDeg : oppositeSideDeg, vMag, altitudeDeg);
+            },
           };
           expect(result.outcome).toBe(scanYear(question).outcome);
           const dayNumbers = (phenomenon: Phenomenon): number[] =>

@@ -253,7 +253,7 @@ export const texts = {
     skylineRule: {
       'altitude-difference': {
         name: 'A star above a hill needs less dark',
-        what: 'A star that clears a hill already stands above the thick air, so the height of the hill is taken off the depth. The usual choice wherever there is a skyline. The trade says altitude difference.',
+        what: 'A star that clears a hill already stands above the thick air, so the height of the hill is taken off the depth. Where star and Sun stand on opposite sides, the hill decides only if it is higher than the haze that hides the star. The usual choice wherever there is a skyline. The trade says altitude difference.',
       },
       'depth-at-crossing': {
         name: 'The same dark over every hill',

@@ -94,7 +94,8 @@ function leastMissing(
     if (!moment.isUp) continue;
     const sky = skyAt(marker.year, marker.ground, moment.jdUt);
     const sunward = moment.azimuthDeg / DEG_PER_RAD - sky.sunAzimuthRad;
-    const margin = moment.sunDepressionDeg - neededForSightDeg(rule, moment.altitudeDeg, sunward);
+    const needed = neededForSightDeg(rule, marker.marker.vMag, moment.altitudeDeg, sunward);
+    const margin = moment.sunDepressionDeg - needed;
     if (margin <= bestMargin) continue;
     best = moment;
     bestMargin = margin;

@@ -19,15 +19,24 @@ const HIGH_DEG = 10;
 /**
  * The depth of the Sun that is needed at one moment: the rule of the dates, applied to the star's own altitude in place
  * of the skyline's, because a star that stands higher is seen in a lighter sky.
+ * @param vMag of the star; it decides what a degree of altitude is worth
  * @param altitudeDeg true altitude of the star
  * @param sunwardRad difference in azimuth between star and Sun
  */
-export function neededForSightDeg(rule: SightRule, altitudeDeg: number, sunwardRad: number): number {
+export function neededForSightDeg(
+  rule: SightRule,
+  vMag: number,
+  altitudeDeg: number,
+  sunwardRad: number,
+): number {
   const { sameSideDeg, oppositeSideDeg, followsAzimuth } = rule.threshold;
   const airDeg = CLARITY_SHIFT_DEG[rule.clarity];
   const toward = Math.cos(wrapPi(sunwardRad));
-  const near = (thresholdDeg: number): number =>
-    neededDepthDeg('altitude-difference', 'same', thresholdDeg + rule.sameSideShiftDeg + airDeg, altitudeDeg);
+  const view = { vMag, clarity: rule.clarity, flatOppositeDeg: oppositeSideDeg + airDeg };
+  const near = (thresholdDeg: number): number => {
+    const inAirDeg = thresholdDeg + rule.sameSideShiftDeg + airDeg;
+    return neededDepthDeg('altitude-difference', 'same', inAirDeg, altitudeDeg, view);
+  };
   if (followsAzimuth)
     return near((sameSideDeg + oppositeSideDeg) / 2 + ((sameSideDeg - oppositeSideDeg) / 2) * toward);
   if (toward >= 0) return near(sameSideDeg);
@@ -45,5 +54,5 @@ export function isSeen(
 ): boolean {
   const altitudeDeg = altitudeRad * DEG_PER_RAD;
   if (altitudeDeg < extinctionAngleDeg(vMag, rule.clarity)) return false;
-  return sunDepressionDeg >= neededForSightDeg(rule, altitudeDeg, sunwardRad);
+  return sunDepressionDeg >= neededForSightDeg(rule, vMag, altitudeDeg, sunwardRad);
 }

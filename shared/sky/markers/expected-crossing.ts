@@ -6,6 +6,7 @@ import { TAU } from '../units/angle.js';
 import type { Clarity } from '../vocabulary.js';
 import { CLARITY_SHIFT_DEG, clarityOfMonth } from '../visibility/clarity.js';
 import { neededAtCrossing } from '../visibility/needed-at-crossing.js';
+import type { HillView } from '../visibility/needed-depth.js';
 import type { MarkerAtPlace } from './place-year.js';
 
 /** The expected crossing of one phenomenon in one turn of the Sun. */
@@ -16,8 +17,6 @@ export interface ExpectedCrossing {
   /** JD UT of the crossing, or null where the sky is not dark enough in this turn. */
   jdUt: number | null;
   clarity: Clarity;
-  /** Place's shift and clarity together. */
-  shiftDeg: number;
   needed: NeededDepth;
 }
 
@@ -25,14 +24,32 @@ export function placeShiftDeg(marker: MarkerAtPlace, side: HorizonSide): number 
   return side === 'same' ? marker.settings.sameSideShiftDeg : marker.settings.oppositeSideShiftDeg;
 }
 
+/** @param widthDeg degrees by which the end of a range asks for more (or less) */
 export function neededIn(
   marker: MarkerAtPlace,
   crossing: SkylineCrossing,
   side: HorizonSide,
-  shiftDeg: number,
+  clarity: Clarity,
+  widthDeg = 0,
 ): NeededDepth {
   const { year, ground, settings, threshold } = marker;
-  return neededAtCrossing(year, ground, crossing, settings.skylineRule, side, threshold, shiftDeg);
+  const clarityDeg = CLARITY_SHIFT_DEG[clarity];
+  return neededAtCrossing(year, ground, crossing, {
+    rule: settings.skylineRule,
+    side,
+    threshold,
+    shiftDeg: placeShiftDeg(marker, side) + clarityDeg + widthDeg,
+    hill: hillViewOf(marker, clarity),
+  });
+}
+
+/** How the marker is seen over a hill in air of some clarity. */
+function hillViewOf({ marker, threshold }: MarkerAtPlace, clarity: Clarity): HillView {
+  return {
+    vMag: marker.vMag,
+    clarity,
+    flatOppositeDeg: threshold.oppositeSideDeg + CLARITY_SHIFT_DEG[clarity],
+  };
 }
 
 /** JD UT of a phenomenon in one turn with a given need, or null. */
@@ -54,7 +71,7 @@ export function expectedInTurn(
   facts: PhenomenonFacts,
   highestRad: number,
 ): ExpectedCrossing {
-  const needed = neededIn(marker, crossing, facts.side, placeShiftDeg(marker, facts.side));
+  const needed = neededIn(marker, crossing, facts.side, 'ordinary');
   const longitudeRad = arcEndRad(crossing, highestRad, needed, facts.end);
   return expectedAtArcEnd(marker, crossing, facts, highestRad, needed, longitudeRad);
 }
@@ -70,20 +87,17 @@ function expectedAtArcEnd(
 ): ExpectedCrossing {
   const jdUt =
     longitudeRad === null ? null : crossingAtArcEnd(marker.year, crossing, longitudeRad, needed, facts.end);
-  const shiftDeg = placeShiftDeg(marker, facts.side);
-  if (jdUt === null) return { crossing, highestRad, jdUt, clarity: 'ordinary', shiftDeg, needed };
+  if (jdUt === null) return { crossing, highestRad, jdUt, clarity: 'ordinary', needed };
 
   const month = monthOfDay(marker.clock.dayOf(jdUt), marker.year.civil.calendar);
   const clarity = clarityOfMonth(marker.settings.clarityByMonth, month);
-  if (clarity === 'ordinary') return { crossing, highestRad, jdUt, clarity, shiftDeg, needed };
-  const shiftInAirDeg = shiftDeg + CLARITY_SHIFT_DEG[clarity];
-  const neededInAir = neededIn(marker, crossing, facts.side, shiftInAirDeg);
+  if (clarity === 'ordinary') return { crossing, highestRad, jdUt, clarity, needed };
+  const neededInAir = neededIn(marker, crossing, facts.side, clarity);
   return {
     crossing,
     highestRad,
     jdUt: crossingWithNeed(marker, crossing, facts, highestRad, neededInAir),
     clarity,
-    shiftDeg: shiftInAirDeg,
     needed: neededInAir,
   };
 }
@@ -98,7 +112,7 @@ export function expectedAroundYear(
   facts: PhenomenonFacts,
 ): ExpectedCrossing[] {
   const { fromRad, toRad } = marker.window;
-  const needed = neededIn(marker, crossing, facts.side, placeShiftDeg(marker, facts.side));
+  const needed = neededIn(marker, crossing, facts.side, 'ordinary');
   const firstTurn = Math.floor((fromRad - crossing.highestRad) / TAU);
   const lastTurn = Math.floor((toRad - crossing.highestRad) / TAU);
 

@@ -4,8 +4,9 @@ import { culminationOf, sinSunDepth, type SkylineCrossing } from '../phenomena/s
 import { monthOfDay } from '../time/civil-year.js';
 import { localSiderealRad } from '../time/sidereal-clock.js';
 import { DEG_PER_RAD, RAD_PER_DEG, wrapTau } from '../units/angle.js';
+import type { Clarity } from '../vocabulary.js';
 import { CLARITY_SHIFT_DEG, clarityOfMonth } from '../visibility/clarity.js';
-import { neededDepthDeg } from '../visibility/needed-depth.js';
+import { highUpDepthDeg } from '../visibility/high-up-depth.js';
 import { neededIn, placeShiftDeg } from './expected-crossing.js';
 import type { MarkerAtPlace } from './place-year.js';
 
@@ -15,10 +16,8 @@ import type { MarkerAtPlace } from './place-year.js';
  * and the dates alone cannot tell whether the star is seen.
  */
 
-/** Degrees that the month of a night adds to the needed depth. */
-function clarityShiftOfNight(marker: MarkerAtPlace, night: number): number {
-  const month = monthOfDay(night, marker.year.civil.calendar);
-  return CLARITY_SHIFT_DEG[clarityOfMonth(marker.settings.clarityByMonth, month)];
+function clarityOfNight(marker: MarkerAtPlace, night: number): Clarity {
+  return clarityOfMonth(marker.settings.clarityByMonth, monthOfDay(night, marker.year.civil.calendar));
 }
 
 /** Calls back for every return of a crossing in a span of nights, with the night and the Sun's longitude. */
@@ -44,10 +43,12 @@ export function sameSideNeeded(
   marker: MarkerAtPlace,
   crossing: SkylineCrossing,
 ): (night: number, sunLongitudeRad: number) => number {
-  const shiftDeg = placeShiftDeg(marker, 'same');
-  const byClarity = [-1, 0, 1].map((clarityDeg) => neededIn(marker, crossing, 'same', shiftDeg + clarityDeg));
-  return (night, sunLongitudeRad) =>
-    byClarity[1 + clarityShiftOfNight(marker, night)]?.sineAt(sunLongitudeRad) ?? Number.POSITIVE_INFINITY;
+  const byClarity = {
+    clear: neededIn(marker, crossing, 'same', 'clear'),
+    ordinary: neededIn(marker, crossing, 'same', 'ordinary'),
+    hazy: neededIn(marker, crossing, 'same', 'hazy'),
+  };
+  return (night, sunLongitudeRad) => byClarity[clarityOfNight(marker, night)].sineAt(sunLongitudeRad);
 }
 
 /**
@@ -55,10 +56,10 @@ export function sameSideNeeded(
  * is being crossed: a star that stands high is seen in a lighter sky.
  */
 function neededUpThere(marker: MarkerAtPlace, altitudeRad: number, night: number): number {
+  const clarity = clarityOfNight(marker, night);
   const thresholdDeg =
-    marker.threshold.sameSideDeg + placeShiftDeg(marker, 'same') + clarityShiftOfNight(marker, night);
-  const depthDeg = neededDepthDeg('altitude-difference', 'same', thresholdDeg, altitudeRad * DEG_PER_RAD);
-  return Math.sin(depthDeg * RAD_PER_DEG);
+    marker.threshold.sameSideDeg + placeShiftDeg(marker, 'same') + CLARITY_SHIFT_DEG[clarity];
+  return Math.sin(highUpDepthDeg(thresholdDeg, altitudeRad * DEG_PER_RAD) * RAD_PER_DEG);
 }
 
 /** Is the star up, and the sky dark enough for its altitude, when the Sun is deepest? */

@@ -42,7 +42,7 @@ function rangeEnd(
   expected: ExpectedCrossing,
   byDeg: number,
 ): Crossing | null {
-  const needed = neededIn(marker, expected.crossing, facts.side, expected.shiftDeg + byDeg);
+  const needed = neededIn(marker, expected.crossing, facts.side, expected.clarity, byDeg);
   const jdUt = crossingWithNeed(marker, expected.crossing, facts, expected.highestRad, needed);
   return jdUt === null ? null : describe(marker, { ...expected, needed }, jdUt);
 }

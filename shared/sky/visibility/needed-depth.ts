@@ -1,18 +1,31 @@
 import type { HorizonSide } from '../phenomena/phenomenon-facts.js';
-import type { SkylineRule } from '../vocabulary.js';
+import type { Clarity, SkylineRule } from '../vocabulary.js';
+import { depthOnHillDeg, hillExcessDeg } from './hill-allowance.js';
 
-/** Above this altitude a star no longer gains from thicker air below it. */
-const THICK_AIR_TOP_DEG = 5;
-const EXCESS_PER_DEG = 0.6;
 /** No hill makes a star visible by day: a third of the threshold always remains. */
 const LEAST_SHARE = 1 / 3;
+
+/** What a hill means for one star: its brightness, the air, and the depth that flat ground asks for. */
+export interface HillView {
+  vMag: number;
+  clarity: Clarity;
+  /** Opposite-side threshold of the star in this air, without the place's shift and the width of a range. */
+  flatOppositeDeg: number;
+}
 
 /**
  * The depth of the Sun that is needed at the moment a star crosses the skyline.
  *
- * Depth at the crossing: the threshold itself, at any altitude. Altitude difference, for the same side only: a star
- * that clears a hill already stands above the thick air and moves together with the Sun, so the altitude counts; on
- * the opposite side the Sun moves against the star and the threshold stays. On a flat horizon both rules agree.
+ * Depth at the crossing: the threshold itself, at any altitude.
+ *
+ * Altitude difference, on the same side: a star that clears a hill already stands above the thick air and moves together
+ * with the Sun, so its altitude counts, less the excess of the model of visibility.
+ *
+ * Altitude difference, on the opposite side: star and Sun move against each other, and a rising (or setting) counts as
+ * seen when the star shows at the skyline and not only higher up. On flat ground the threshold says how high that is:
+ * while the star climbs out of the haze the Sun sinks as far. A hill lower than that changes nothing about the evening,
+ * so at its crossing the Sun is deeper by the hill's own altitude; a higher hill asks for the depth at which the star
+ * shows on the hill. Whichever asks for less is the rule. On a flat horizon all agree.
  * @param thresholdDeg arcus visionis with shifts, clarity and range already in it
  * @param skylineAltitudeDeg altitude of the skyline at the crossing
  * @returns degrees, never negative: a Sun above the horizon is not dark
@@ -22,9 +35,13 @@ export function neededDepthDeg(
   side: HorizonSide,
   thresholdDeg: number,
   skylineAltitudeDeg: number,
+  hill: HillView,
 ): number {
-  if (rule === 'depth-at-crossing' || side === 'opposite') return Math.max(0, thresholdDeg);
-  const altitudeDeg = Math.max(0, skylineAltitudeDeg);
-  const excessDeg = EXCESS_PER_DEG * Math.max(0, altitudeDeg - THICK_AIR_TOP_DEG);
-  return Math.max(0, thresholdDeg * LEAST_SHARE, thresholdDeg - altitudeDeg + excessDeg);
+  if (rule === 'depth-at-crossing' || skylineAltitudeDeg <= 0) return Math.max(0, thresholdDeg);
+  const { vMag, clarity, flatOppositeDeg } = hill;
+  const changeDeg =
+    side === 'same'
+      ? hillExcessDeg(vMag, clarity, skylineAltitudeDeg) - skylineAltitudeDeg
+      : Math.min(skylineAltitudeDeg, depthOnHillDeg(vMag, clarity, skylineAltitudeDeg) - flatOppositeDeg);
+  return Math.max(0, thresholdDeg * LEAST_SHARE, thresholdDeg + changeDeg);
 }

@@ -10,6 +10,7 @@ import { thresholdOf } from '#shared/sky/visibility/threshold-sets.js';
 
 const DEG = Math.PI / 180;
 const year = prepareYear(2027);
+const hill = { vMag: -1.46, clarity: 'ordinary', flatOppositeDeg: 7 } as const;
 const degOf = (sine: number): number => Math.asin(sine) / DEG;
 
 function setup(skylineDeg: number) {
@@ -25,17 +26,30 @@ describe('the needed depth at a crossing', () => {
     const classes = thresholdOf('three-class', -1.46, null);
     const needed = (side: 'same' | 'opposite', shiftDeg: number): number =>
       degOf(
-        neededAtCrossing(year, ground, crossing, 'altitude-difference', side, classes, shiftDeg).sineAt(0),
+        neededAtCrossing(year, ground, crossing, {
+          rule: 'altitude-difference',
+          side,
+          threshold: classes,
+          shiftDeg,
+          hill,
+        }).sineAt(0),
       );
-    expect(needed('same', 0)).toBeCloseTo(8, 9);
-    expect(needed('same', 1.5)).toBeCloseTo(9.5, 9);
-    expect(needed('opposite', -1)).toBeCloseTo(6, 9);
+    // On a hill of 3° Sirius is still seen best higher up: no excess, the whole altitude counts.
+    expect(needed('same', 0)).toBeCloseTo(8, 1);
+    expect(needed('same', 1.5) - needed('same', 0)).toBeCloseTo(1.5, 9);
+    expect(needed('opposite', -1) - needed('opposite', 0)).toBeCloseTo(-1, 9);
   });
 
   it('follows the Sun’s azimuth where the set asks for it', () => {
     const { ground, crossing } = setup(0);
     const set = thresholdOf('azimuth-difference', -1.46, null);
-    const needed = neededAtCrossing(year, ground, crossing, 'depth-at-crossing', 'same', set, 0.5);
+    const needed = neededAtCrossing(year, ground, crossing, {
+      rule: 'depth-at-crossing',
+      side: 'same',
+      threshold: set,
+      shiftDeg: 0.5,
+      hill,
+    });
     for (const longitude of [0, 1, 2, 3, 4, 5, 6]) {
       const sun = sunAtCrossing(year, ground.latitude, crossing, longitude);
       const expected = 9.5 + 2.5 * Math.cos(crossing.starAzimuthRad - sun.azimuthRad);
