@@ -18,6 +18,8 @@ import {
   assertYear,
   assertYears,
 } from './argument-checks.js';
+import { airYearOf } from './air/air-year.js';
+import type { AirYear } from './air/air-types.js';
 import { compassPoint as nearestPoint } from './horizon/compass.js';
 import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
@@ -68,6 +70,7 @@ import type { CompassPoint } from './vocabulary.js';
 import { WATCH_SIDES, type WatchSide } from './vocabulary.js';
 
 export type * from './types.js';
+export type * from './air/air-types.js';
 export type * from './look/look-types.js';
 export * from './moon-door.js';
 export * from './vocabulary.js';
@@ -213,6 +216,25 @@ function civilYearOfDay(dayNumber: number): number {
   const year = gregorianYear >= FIRST_GREGORIAN_YEAR ? gregorianYear : julianLabel(dayNumber).year;
   assertYear(year, 'dayNumber');
   return year;
+}
+
+/**
+ * A second opinion for one star or figure: the four phenomena by the model of visibility in clear, ordinary and hazy air
+ * beside the place's rule and all published threshold sets, and the minutes in which it shows around its dates.
+ */
+export function computeAirYear(
+  markerKey: MarkerKey,
+  site: Site,
+  settings: VisibilitySettings,
+  year: number,
+): AirYear {
+  assertSite(site);
+  assertSettings(settings);
+  assertYear(year);
+  return airYearOf(
+    markerAtPlace(placeYearOf(preparedYearOf(year), site, settings), markerOf(markerKey)),
+    site,
+  );
 }
 
 /** When to stop looking in the morning and to begin in the evening of a civil day, so that nobody looks at the Sun. */

@@ -1,6 +1,12 @@
 // npm run bench            a table for people
 // npm run bench -- --json  one JSON line
-import { DAILY_SEARCH_STAR, dailySearchStarYear, scanStarYear } from './comparisons.js';
+import {
+  DAILY_SEARCH_STAR,
+  dailySearchStarYear,
+  minuteScanStarYear,
+  modelStarYear,
+  scanStarYear,
+} from './comparisons.js';
 import { fastestMs } from './stopwatch.js';
 import { benchSettings, benchSite, hillSite } from './subject.js';
 
@@ -31,6 +37,8 @@ const markerFinderMs = fastestMs(5, () => findEverything(benchSite));
 const markerFinderHillsMs = fastestMs(5, () => findEverything(hillSite));
 const crossingScanStarYearMs = fastestMs(7, scanStarYear);
 const dailySearchStarYearMs = fastestMs(7, dailySearchStarYear);
+const modelStarYearMs = fastestMs(15, modelStarYear);
+const minuteScanStarYearMs = fastestMs(3, minuteScanStarYear);
 
 const rounded = (value: number): number => Number(value.toPrecision(4));
 const results = {
@@ -45,6 +53,9 @@ const results = {
   markerFinderRatio: Math.round((FOUND_KEYS.length * crossingScanStarYearMs) / markerFinderMs),
   crossingScanStarYearMs: rounded(crossingScanStarYearMs),
   dailySearchStarYearMs: rounded(dailySearchStarYearMs),
+  modelStarYearMs: rounded(modelStarYearMs),
+  minuteScanStarYearMs: rounded(minuteScanStarYearMs),
+  modelRatio: Math.round(minuteScanStarYearMs / modelStarYearMs),
   ratio: Math.round((dailySearchStarYearMs * STARS.length) / wholeSkyYearMs),
 };
 
@@ -62,6 +73,9 @@ const meanings: Record<keyof typeof results, string> = {
     'plain scan of the same stars (one measured, times their number) ÷ finder, ranges and ranking in the finder only',
   crossingScanStarYearMs: 'one star-year by the plain scan that the tests use as oracle',
   dailySearchStarYearMs: `one star-year by astronomy-engine’s daily rise and set search (${DAILY_SEARCH_STAR})`,
+  modelStarYearMs: 'one star-year of the model of visibility: four phenomena in one air (aim 50)',
+  minuteScanStarYearMs: 'the same four by looking at every minute of the year through the same model',
+  modelRatio: 'minute scan ÷ model',
   ratio: 'daily search for the whole table ÷ whole sky (aim 5000)',
 };
 

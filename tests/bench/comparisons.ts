@@ -1,8 +1,15 @@
 import { AstroTime, Body, DefineStar, Equator, Horizon, Observer, SearchRiseSet } from 'astronomy-engine';
 
-import { benchSite } from './subject.js';
+import { benchSettings, benchSite } from './subject.js';
 
-import { dayNumberOf } from '#shared/sky/index.js';
+import { modelDays } from '#shared/sky/air/model-year.js';
+import { showsAtDeg } from '#shared/sky/air/sighting.js';
+import { dayNumberOf, PHENOMENA } from '#shared/sky/index.js';
+import { resolveMarker } from '#shared/sky/markers/marker-key.js';
+import { markerAtPlace, placeYearOf } from '#shared/sky/markers/place-year.js';
+import { prepareYear } from '#shared/sky/phenomena/prepared-year.js';
+import { airAtPlace } from '#shared/sky/visibility/air.js';
+import { minuteScanYear } from '#tests/support/sky/minute-scan.js';
 import { scanYear } from '#tests/support/sky/oracle-scan.js';
 
 /** Aldebaran: an ordinary bright star near the ecliptic that rises and sets at the measured place. */
@@ -38,4 +45,28 @@ export function dailySearchStarYear(): void {
       Horizon(found, observer, sun.ra, sun.dec);
     }
   }
+}
+
+const air = airAtPlace(benchSite, 6, 'ordinary');
+const aldebaran = resolveMarker(`hr${ALDEBARAN.hr}`);
+const atPlace =
+  aldebaran && markerAtPlace(placeYearOf(prepareYear(2027), benchSite, benchSettings), aldebaran);
+
+/** The four phenomena of one star-year by the model of visibility. */
+export function modelStarYear(): void {
+  if (atPlace) for (const phenomenon of PHENOMENA) modelDays(atPlace, phenomenon, () => air);
+}
+
+/** The same four by looking at every minute of the year through the same model. */
+export function minuteScanStarYear(): void {
+  if (!atPlace) return;
+  minuteScanYear({
+    hr: ALDEBARAN.hr,
+    latitudeDeg: benchSite.latitudeDeg,
+    longitudeDeg: benchSite.longitudeDeg,
+    year: { firstDay, lastDay },
+    skylineDeg: 0,
+    nearSkylineDeg: showsAtDeg(atPlace),
+    airOf: () => air,
+  });
 }

@@ -47,7 +47,8 @@ function rangeEnd(
   return jdUt === null ? null : describe(marker, { ...expected, needed }, jdUt);
 }
 
-function occurrenceOf(
+/** An expected crossing with the ends of its range. */
+export function occurrenceOf(
   marker: MarkerAtPlace,
   facts: PhenomenonFacts,
   expected: ExpectedCrossing,
