@@ -4,6 +4,8 @@ import helmet from 'helmet';
 import { randomUUID } from 'node:crypto';
 import path from 'node:path';
 import { pinoHttp } from 'pino-http';
+import { airRoutes } from './features/air/air.routes.js';
+import { AirService } from './features/air/air.service.js';
 import { AuditListService } from './features/audit/audit-list.service.js';
 import { auditRoutes } from './features/audit/audit.routes.js';
 import { calendarsRoutes } from './features/calendars/calendars.routes.js';
@@ -118,6 +120,7 @@ export function createApp(options: AppOptions): App {
   placesRoutes(mount, places);
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));
+  airRoutes(mount, new AirService(places, skyYears));
 
   finderRoutes(mount, new FinderService(places));
   driftRoutes(mount, new DriftService(places));

@@ -1,4 +1,5 @@
 import type { Endpoint } from './endpoint.js';
+import { airEndpoints } from './air.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
 import { driftEndpoints } from './drift.js';
@@ -24,6 +25,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   finderEndpoints,
   driftEndpoints,
   moonsEndpoints,
+  airEndpoints,
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

@@ -1,3 +1,4 @@
+import { texts as air } from './en/air.js';
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
@@ -31,6 +32,7 @@ export const en = {
   finder,
   drift,
   moons,
+  air,
   calendars,
   reviews,
   sheets,

@@ -31,6 +31,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
   { path: PATTERNS.drift, texts: ['drift', 'sky'], load: () => import('./routes/drift.js') },
   { path: PATTERNS.finder, texts: ['finder', 'sky'], load: () => import('./routes/finder.js') },
+  { path: PATTERNS.air, texts: ['air', 'stars', 'sky'], load: () => import('./routes/air.js') },
   { path: PATTERNS.newPlace, texts: ['places', 'sky'], load: () => import('./routes/place-new.js') },
   { path: PATTERNS.place, texts: ['places', 'sky'], load: () => import('./routes/place.js') },
   { path: PATTERNS.village, texts: [], load: () => import('./routes/village.js') },

@@ -9,6 +9,7 @@ export const PATTERNS = {
   star: '/stars/:markerKey',
   drift: '/stars/:markerKey/drift',
   finder: '/finder',
+  air: '/stars/:markerKey/air',
   newPlace: '/places/new',
   place: '/places/:placeId',
   village: '/village',
@@ -63,6 +64,9 @@ export const paths = {
     withQuery(`/stars/${encodeURIComponent(markerKey)}/drift`, query),
   /** Which marker falls near a day. With a calendar, its entry waits for the answer. */
   finder: (query: FinderQuery = {}) => withQuery(PATTERNS.finder, { ...query }),
+  /** The same star in clear, ordinary and hazy air. */
+  air: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>
+    withQuery(`/stars/${encodeURIComponent(markerKey)}/air`, query),
   newPlace: () => PATTERNS.newPlace,
   place: (placeId: string) => `/places/${encodeURIComponent(placeId)}`,
   village: () => PATTERNS.village,

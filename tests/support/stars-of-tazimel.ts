@@ -1,8 +1,10 @@
+import { AirService } from '#server/features/air/air.service.js';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
 import type { PlacesService } from '#server/features/places/places.service.js';
 import { SkyYearsService } from '#server/features/stars/sky-years.service.js';
 import { SkylineEffectsService } from '#server/features/stars/skyline-effects.service.js';
 import { StarsService, type StarTable } from '#server/features/stars/stars.service.js';
+import type { AirAnswer } from '#shared/contracts/air.js';
 import type { Place } from '#shared/contracts/places.js';
 import type { MarkerDetail, SkylineEffect } from '#shared/contracts/stars.js';
 import { OFFICER } from './on-board.js';
@@ -32,4 +34,10 @@ export function starDetail(markerKey: string, year: number, place: Place = TAZIM
 
 export function skylineEffects(year: number, place: Place = TAZIMEL): SkylineEffect[] {
   return new SkylineEffectsService(undefined as never, skyYears).of(place, year);
+}
+
+export function starAir(markerKey: string, year: number, place: Place = TAZIMEL): Promise<AirAnswer> {
+  const places = { read: () => Promise.resolve(place) };
+  const service = new AirService(places as unknown as PlacesService, skyYears);
+  return service.read(undefined as never, place.id, markerKey, year);
 }

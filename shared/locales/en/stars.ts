@@ -212,6 +212,7 @@ export const texts = {
     ways: 'More about it',
     way: {
       drift: 'How it moved through the centuries',
+      air: 'In clear and in hazy air',
     },
   },
 

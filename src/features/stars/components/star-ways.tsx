@@ -11,13 +11,14 @@ interface Here {
 
 /** One way on from a star: its words are `stars:star.way.<key>`. */
 interface StarWay {
-  key: 'drift';
+  key: 'drift' | 'air';
   path: (here: Here) => string;
 }
 
 /** Ways on from a star's page, in their order. Another one is a line here and a text. */
 const STAR_WAYS: readonly StarWay[] = [
   { key: 'drift', path: ({ markerKey, placeId, year }) => paths.drift(markerKey, { placeId, year }) },
+  { key: 'air', path: ({ markerKey, placeId, year }) => paths.air(markerKey, { placeId, year }) },
 ];
 
 /** What else there is to know of a star. */

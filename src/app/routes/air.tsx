@@ -1,0 +1,1 @@
+export { AirPage as Component } from '#src/features/air/components/air-page.js';
