@@ -92,5 +92,7 @@ export const texts = {
     'Air and sky after Schaefer 1993 and Rozenberg 1966, the eye after Hecht 1947 and Knoll 1946, the Moon after Krisciunas and Schaefer 1991. The variants in print differ by up to a magnitude.',
   basisOpposite:
     'For last risings and first settings the model takes from the rule how high a star stands when its rising counts as seen.',
+  basisFigure:
+    'Of a figure the model sees the brightest star alone; the light of the others may show it some days sooner.',
   basisEngine: 'Computed by engine {{version}}; the village’s rule: {{source}}.',
 } as const;

@@ -125,11 +125,11 @@ export const texts = {
     returns: '{{name}} returns',
     leaves: '{{name}} leaves',
     shows: '{{name}}: {{phenomenon}}',
-    basis: 'Dates: {{rule}}, air of each month, {{skyline}}, engine {{engineVersion}}.',
+    basis: 'Dates: Sun’s depth by the {{rule}}, air of each month, {{skyline}}, engine {{engineVersion}}.',
     rule: {
-      'three-class': 'three-class rule',
-      'linear-magnitude': 'rule by brightness',
-      'azimuth-difference': 'rule by direction',
+      'three-class': 'three-class rule (Ideler 1819, in Vogt 1920)',
+      'linear-magnitude': 'rule by brightness (after Purrington 1988)',
+      'azimuth-difference': 'rule by direction (after Vogt 1920)',
     },
     skyline: { hills: 'this skyline', flat: 'flat horizon' },
     noDate: {
@@ -142,7 +142,7 @@ export const texts = {
     },
   },
   basis:
-    'Dawnpeg, engine {{engineVersion}}; eye-and-air rule: {{rule}}; shifts {{sameSideShiftDeg}}° and {{oppositeSideShiftDeg}}°; skyline rule: {{skylineRule}}; star data: Bright Star Catalogue, 5th revised edition.',
+    'Dawnpeg, engine {{engineVersion}}; method: depth of the Sun when the star stands on the skyline (arcus visionis), both without refraction; eye-and-air rule: {{rule}}; shifts {{sameSideShiftDeg}}° and {{oppositeSideShiftDeg}}°; skyline rule: {{skylineRule}}; star data: Bright Star Catalogue, 5th revised edition.',
   skylineRule: {
     'depth-at-crossing': 'depth at the crossing',
     'altitude-difference': 'altitude difference',

@@ -3,13 +3,15 @@ import type { Ground } from '../phenomena/skyline-crossing.js';
 import type { DayClock } from '../time/civil-day.js';
 import type { VisibilitySettings } from '../types.js';
 import { DEG_PER_RAD, RAD_PER_DEG } from '../units/angle.js';
-import { neededDepthDeg } from '../visibility/needed-depth.js';
+import { type HillView, neededDepthDeg } from '../visibility/needed-depth.js';
 import type { VenusAppearance } from '../vocabulary.js';
 import { type VenusCrossing, type VenusDay, venusDayOf } from './venus-crossings.js';
 import type { VenusCycle } from './venus-cycle.js';
 
 /** How deep the Sun must be for Venus on the horizon [Ptolemy, Almagest XIII 7; value M]. */
 export const VENUS_ARCUS_VISIONIS_DEG = 5;
+/** What a hill takes and gives follows the brightness that Venus has near its conjunctions. */
+const VENUS_VIEW: HillView = { vMag: -4, clarity: 'ordinary', flatOppositeDeg: VENUS_ARCUS_VISIONIS_DEG };
 /** So long before the inferior and after the superior conjunction an appearance of the other side may begin. */
 const BEFORE_INFERIOR_DAYS = 25;
 const AFTER_SUPERIOR_DAYS = 10;
@@ -92,7 +94,8 @@ export function findVenus(venus: VenusAtPlace, search: VenusSearch, shiftDeg: nu
     const solarDay = search.fromDay + step * search.step;
     const crossing = venus.day(solarDay)[search.crossing];
     if (!crossing) continue;
-    const neededDeg = neededDepthDeg(skylineRule, 'same', thresholdDeg, crossing.altitudeRad * DEG_PER_RAD);
+    const altitudeDeg = crossing.altitudeRad * DEG_PER_RAD;
+    const neededDeg = neededDepthDeg(skylineRule, 'same', thresholdDeg, altitudeDeg, VENUS_VIEW);
     if (crossing.sunDepressionRad * DEG_PER_RAD >= neededDeg) return { solarDay, crossing, neededDeg };
   }
   return null;

@@ -14,7 +14,8 @@ import {
  * alone, so each is made once, when it is first asked for, and serves every place, star and year.
  */
 
-const BRIGHTEST_MAG = -1.5;
+/** Sirius has −1.5; Venus, which follows the same rule, up to −4.5. */
+const BRIGHTEST_MAG = -4.5;
 const FAINTEST_MAG = 5;
 const MAG_STEP = 0.25;
 const MAG_COUNT = (FAINTEST_MAG - BRIGHTEST_MAG) / MAG_STEP + 1;

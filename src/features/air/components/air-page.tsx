@@ -3,7 +3,8 @@ import { useTranslation } from 'react-i18next';
 import { useParams, useSearchParams } from 'react-router-dom';
 import type { AirAnswer } from '#shared/contracts/air.js';
 import type { Place } from '#shared/contracts/places.js';
-import { FIRST_YEAR, LAST_YEAR, PHENOMENA } from '#shared/sky/vocabulary.js';
+import type { Phenomenon } from '#shared/sky/vocabulary.js';
+import { readYear } from '#src/lib/civil-year.js';
 import { useCurrentPlace } from '#src/lib/community.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { todayIn } from '#src/lib/days.js';
@@ -39,7 +40,7 @@ function AirAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
   const problems = useProblemWords();
   const dates = useDateWords();
   const [search] = useSearchParams();
-  const year = readYear(search.get('year')) ?? todayIn(place.timeZone).year;
+  const year = readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year;
   const { data, error, refetch } = useQuery(airQuery(place.id, markerKey, year));
   const title = data ? t('title', { star: markerName(data) }) : t('titlePlain');
   usePageTitle(title);
@@ -71,23 +72,33 @@ function AirAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
   );
 }
 
+/** Those with minutes first: side by side on a wide screen. */
+const IN_ORDER: readonly Phenomenon[] = [
+  'heliacal-rising',
+  'heliacal-setting',
+  'acronychal-rising',
+  'cosmical-setting',
+];
+
 function Answer({ answer }: { answer: AirAnswer }) {
   const { t } = useTranslation(['air', 'stars']);
   const { outcome, outcomeDetail } = answer;
   const hasDays = outcome === 'rises-and-sets';
   return (
-    <div className="grid gap-4">
-      <Board>
-        <p>{t('lead')}</p>
-        <p className="mt-2">{t('disagree')}</p>
-      </Board>
-      <Care>
-        <p>{t('stars:star.eyes')}</p>
-        <p className="mt-1">{t('stars:star.nights')}</p>
-      </Care>
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4 wide:grid-cols-[minmax(0,7fr)_minmax(0,5fr)] wide:items-start wide:gap-6">
+        <Board>
+          <p>{t('lead')}</p>
+          <p className="mt-2">{t('disagree')}</p>
+        </Board>
+        <Care>
+          <p>{t('stars:star.eyes')}</p>
+          <p className="mt-1">{t('stars:star.nights')}</p>
+        </Care>
+      </div>
       {hasDays ? (
-        <div className="grid gap-4 wide:grid-cols-2 wide:items-start wide:gap-6">
-          {PHENOMENA.map((phenomenon) => (
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-4 wide:grid-cols-2 wide:items-start wide:gap-6">
+          {IN_ORDER.map((phenomenon) => (
             <PhenomenonBoard key={phenomenon} answer={answer} phenomenon={phenomenon} />
           ))}
         </div>
@@ -99,10 +110,4 @@ function Answer({ answer }: { answer: AirAnswer }) {
       <ModelBasis answer={answer} />
     </div>
   );
-}
-
-/** The year of the address; null for anything the engine does not offer. */
-function readYear(text: string | null): number | null {
-  const year = text === null || !/^-?\d{1,4}$/u.test(text) ? Number.NaN : Number(text);
-  return year >= FIRST_YEAR && year <= LAST_YEAR ? year : null;
 }

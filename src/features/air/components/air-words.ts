@@ -3,9 +3,10 @@ import { useTranslation } from 'react-i18next';
 import type { AirOccurrence, ModelDay } from '#shared/contracts/air.js';
 import type { CivilDay, OccurrenceDays } from '#shared/contracts/stars.js';
 import { CLARITIES } from '#shared/sky/vocabulary.js';
+import { civilDate } from '#src/lib/civil-year.js';
 import { useDateWords } from '#src/lib/date-words.js';
-import { dayNumberOf, readDate } from '#src/lib/days.js';
-import { anchorOf, dateIn } from '../model/air-days.js';
+import { dayNumberOf } from '#src/lib/days.js';
+import { anchorOf } from '../model/air-days.js';
 
 /** Dates and sentences of this page, in the calendar of the year on screen. */
 export interface AirWords {
@@ -24,15 +25,14 @@ export function useAirWords(year: number): AirWords {
   const { t } = useTranslation('air');
   const words = useDateWords();
   return useMemo(() => {
-    const date = (day: CivilDay) => dateIn(day, year);
+    const date = (day: CivilDay) => civilDate(day, year);
     const about = ({ expected, early, late }: OccurrenceDays) =>
       words.aboutWithin(date(expected), early && date(early), late && date(late));
     const day = (value: CivilDay) => words.day(date(value));
     /** Any day beside a labelled one; a leap day between them in an ancient year is a day off in the words only. */
     const numberBeside = (occurrence: AirOccurrence, dayNumber: number): number => {
       const anchor = anchorOf(occurrence);
-      const parts = anchor && readDate(date(anchor));
-      return anchor && parts ? dayNumberOf(parts) + dayNumber - anchor.dayNumber : dayNumber;
+      return anchor ? dayNumberOf(date(anchor)) + dayNumber - anchor.dayNumber : dayNumber;
     };
     return {
       about,

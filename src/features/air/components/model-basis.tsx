@@ -19,6 +19,7 @@ export function ModelBasis({ answer }: { answer: AirAnswer }) {
         </p>
         <p>{t('basisEyes')}</p>
         <p>{t('basisOpposite')}</p>
+        {answer.kind === 'figure' && <p>{t('basisFigure')}</p>}
         <p className="text-small text-umber-soft">{t('basisSource')}</p>
         <p className="text-small text-umber-soft">
           {t('basisEngine', { version: answer.basis.engineVersion, source: answer.basis.thresholdSource })}

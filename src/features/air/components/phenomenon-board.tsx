@@ -30,7 +30,9 @@ export function PhenomenonBoard({ answer, phenomenon }: { answer: AirAnswer; phe
       {occurrences.map((occurrence, index) => (
         <div
           key={occurrence.rule?.expected.dayNumber ?? index}
-          className={index > 0 ? 'mt-5 grid gap-3' : 'grid gap-3'}
+          className={
+            index > 0 ? 'mt-5 grid grid-cols-[minmax(0,1fr)] gap-3' : 'grid grid-cols-[minmax(0,1fr)] gap-3'
+          }
         >
           {index > 0 && <p className="text-small text-umber-soft">{t('again')}</p>}
           <OccurrenceDays answer={answer} occurrence={occurrence} phenomenon={phenomenon} words={words} />

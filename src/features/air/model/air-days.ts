@@ -2,14 +2,6 @@ import type { AirOccurrence } from '#shared/contracts/air.js';
 import type { CivilDay } from '#shared/contracts/stars.js';
 import { CLARITIES } from '#shared/sky/vocabulary.js';
 
-/** Years before it are written in the Julian calendar. */
-const FIRST_GREGORIAN_YEAR = 1583;
-
-/** A day as the people of the year on screen wrote it. */
-export function dateIn(day: CivilDay, year: number): string {
-  return year >= FIRST_GREGORIAN_YEAR ? day.gregorian : day.julian;
-}
-
 /** By how many days the model's day moves from clear to hazy air; null where one of them has none. */
 export function spreadDays({ byModel }: AirOccurrence): number | null {
   const days = CLARITIES.map((clarity) => byModel[clarity]?.dayNumber ?? Number.NaN);

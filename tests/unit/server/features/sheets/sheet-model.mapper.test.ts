@@ -285,7 +285,9 @@ describe('the rest of the sheet', () => {
       signedBy: 'Elder A-1 and Ostrel',
       placeName: 'Upper terraces',
       contacts: { weather: 'call 900', agriculture: 'call 901' },
-      basis: ['Dates: three-class rule, air of each month, this skyline, engine 1.0.0.'],
+      basis: [
+        'Dates: Sun’s depth by the three-class rule (Ideler 1819, in Vogt 1920), air of each month, this skyline, engine 1.0.0.',
+      ],
       label: '2027-1',
     });
   });

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { AirOccurrence } from '#shared/contracts/air.js';
-import { agreementOf, anchorOf, dateIn, spreadDays } from '#src/features/air/model/air-days.js';
+import { agreementOf, anchorOf, spreadDays } from '#src/features/air/model/air-days.js';
 
 const day = (dayNumber: number) => ({ dayNumber, gregorian: '2027-06-07', julian: '2027-05-25' });
 function occurrence(
@@ -49,10 +49,5 @@ describe('the days of an occurrence', () => {
     expect(anchorOf(occurrence([5, 6, 7]))?.dayNumber).toBe(7);
     expect(anchorOf(occurrence([null, 6, 7], null))?.dayNumber).toBe(6);
     expect(anchorOf(occurrence([null, null, null], null))).toBeNull();
-  });
-
-  it('are written in the calendar of their year', () => {
-    expect(dateIn(day(1), 2027)).toBe('2027-06-07');
-    expect(dateIn(day(1), 1582)).toBe('2027-05-25');
   });
 });
