@@ -16,6 +16,7 @@ const skyLayers = [
   'look',
   'moon',
   'planets',
+  'sky-markers',
 ];
 
 /** The server's lower folders in the same order. */

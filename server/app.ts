@@ -33,6 +33,9 @@ import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
 import { sheetsRoutes } from './features/sheets/sheets.routes.js';
 import { SheetsService } from './features/sheets/sheets.service.js';
+import { SkyMarkerYearsService } from './features/sky-markers/sky-marker-years.service.js';
+import { skyMarkersRoutes } from './features/sky-markers/sky-markers.routes.js';
+import { SkyMarkersService } from './features/sky-markers/sky-markers.service.js';
 import { SkyYearsService } from './features/stars/sky-years.service.js';
 import { SkylineEffectsService } from './features/stars/skyline-effects.service.js';
 import { starsRoutes } from './features/stars/stars.routes.js';
@@ -125,7 +128,10 @@ export function createApp(options: AppOptions): App {
   finderRoutes(mount, new FinderService(places));
   driftRoutes(mount, new DriftService(places));
 
-  const sky = new SkyDatesService(skyYears);
+  const skyMarkerYears = new SkyMarkerYearsService();
+  skyMarkersRoutes(mount, new SkyMarkersService(places, skyMarkerYears));
+
+  const sky = new SkyDatesService(skyYears, skyMarkerYears);
   const contents = new FrozenContentService(dataSource, clock, sky);
   const versions = new VersionsService(dataSource);
   const publishing = new PublishingService(dataSource, clock, contents, versions);

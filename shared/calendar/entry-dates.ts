@@ -5,9 +5,15 @@ import type {
   Occurrence,
   Phenomenon,
   PhenomenonOutcome,
+  SkyMarkerOccurrence,
+  SkyMarkerOutcome,
+  SkyMarkerReason,
+  SkyMarkerSpec,
+  SkyMarkerYear,
   SkyNote,
   StarOutcome,
 } from '#shared/sky/index.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import type { EntryDates, EntryTiming, EntryWarning, LabelledDay, OccurrenceDays } from './entry-model.js';
 import { ENTRY_WARNINGS } from './entry-model.js';
@@ -30,22 +36,39 @@ export interface MarkerDays {
   >;
 }
 
+/** The same of a marker beyond a star's first and last days. */
+export interface SkyMarkerDays {
+  spec: SkyMarkerSpec;
+  year: number;
+  outcome: SkyMarkerOutcome;
+  reason: SkyMarkerReason | null;
+  occurrences: readonly OccurrenceDays[];
+}
+
 /**
- * What the sky and the rules make of one entry in one civil year. `markerYear` is the leading marker's year at the
+ * What the sky and the rules make of one entry in one civil year. `leadYear` is the leading marker's year at the
  * calendar's place; it is not asked for where a fixed date leads. The answer rests on this entry alone, so the
  * same entry always gives the same answer; what two entries have to do with each other is in `overlap.ts`.
  */
-export function entryDatesOf(timing: EntryTiming, year: number, markerYear: MarkerYear | null): EntryDates {
-  return entryDatesFromDays(timing, year, markerYear && markerDaysOf(markerYear));
+export function entryDatesOf(
+  timing: EntryTiming,
+  year: number,
+  leadYear: MarkerYear | SkyMarkerYear | null,
+): EntryDates {
+  if (leadYear !== null && 'spec' in leadYear) {
+    const occurrences = leadYear.occurrences.map(occurrenceDaysOf);
+    return entryDatesFromDays(timing, year, { ...leadYear, occurrences });
+  }
+  return entryDatesFromDays(timing, year, leadYear && markerDaysOf(leadYear));
 }
 
 /** The same from days that are at hand already. */
 export function entryDatesFromDays(
   timing: EntryTiming,
   year: number,
-  markerDays: MarkerDays | null,
+  leadDays: MarkerDays | SkyMarkerDays | null,
 ): EntryDates {
-  const lead = leadOf(timing, year, markerDays);
+  const lead = leadOf(timing, year, leadDays);
   const warnings = new Set(lead.warnings);
   let window: EntryDates['window'] = null;
   if (lead.dayNumber !== null) {
@@ -63,6 +86,8 @@ export function entryDatesFromDays(
   return {
     starOutcome: lead.starOutcome,
     phenomenonOutcome: lead.phenomenonOutcome,
+    // Left out, not undefined: an entry that goes by a star must give the same text as before there were such signs.
+    ...(lead.sky && { sky: lead.sky }),
     marker: lead.marker,
     window,
     warnings: inOrder(warnings),
@@ -78,11 +103,12 @@ interface Lead {
   dayNumber: number | null;
   starOutcome: EntryDates['starOutcome'];
   phenomenonOutcome: EntryDates['phenomenonOutcome'];
+  sky?: NonNullable<EntryDates['sky']>;
   marker: OccurrenceDays | null;
   warnings: EntryWarning[];
 }
 
-function leadOf({ lead }: EntryTiming, year: number, markerDays: MarkerDays | null): Lead {
+function leadOf({ lead }: EntryTiming, year: number, leadDays: MarkerDays | SkyMarkerDays | null): Lead {
   if (lead.type === 'fixed-date') {
     return {
       dayNumber: dayNumberOf(year, lead.date.month, lead.date.day),
@@ -92,6 +118,8 @@ function leadOf({ lead }: EntryTiming, year: number, markerDays: MarkerDays | nu
       warnings: [],
     };
   }
+  if (lead.type === 'sky') return skyLeadOf(lead, year, leadDays);
+  const markerDays = leadDays && 'markerKey' in leadDays ? leadDays : null;
   if (markerDays?.markerKey !== lead.markerKey || markerDays.year !== year) {
     throw new RangeError(`The entry goes by ${lead.markerKey} in ${year}; another marker's year was given.`);
   }
@@ -117,6 +145,39 @@ function leadOf({ lead }: EntryTiming, year: number, markerDays: MarkerDays | nu
     outcome,
     outcome === 'never-dark-enough' ? 'star-does-not-serve' : 'no-date-this-year',
   );
+}
+
+function skyLeadOf(
+  lead: Extract<EntryTiming['lead'], { type: 'sky' }>,
+  year: number,
+  leadDays: MarkerDays | SkyMarkerDays | null,
+): Lead {
+  const days = leadDays && 'spec' in leadDays ? leadDays : null;
+  if (days?.year !== year || !sameJson(days.spec, lead.spec)) {
+    throw new RangeError(`The entry goes by ${lead.spec.kind} in ${year}; another sign's year was given.`);
+  }
+  const { outcome, reason, occurrences } = days;
+  const sky = { outcome, reason };
+  const occurrence = occurrences[lead.occurrence - 1];
+  if (occurrence) {
+    const { expected, early, late, notes } = occurrence;
+    return {
+      dayNumber: expected.dayNumber,
+      starOutcome: null,
+      phenomenonOutcome: null,
+      sky,
+      // Written out: days from the API carry the direction and the time as well, which are no part of an entry.
+      marker: { expected, early, late, notes: [...notes] },
+      warnings: WARNED_NOTES.filter((note) => notes.includes(note)),
+    };
+  }
+  const warning =
+    occurrences.length > 0
+      ? 'one-occurrence-only'
+      : outcome === 'never-here'
+        ? 'sign-not-here'
+        : 'no-date-this-year';
+  return { ...undated(null, null, warning), sky };
 }
 
 function undated(
@@ -147,7 +208,7 @@ function markerDaysOf({ markerKey, year, outcome, notes, phenomena }: MarkerYear
 }
 
 /** The days of an occurrence without the geometry of its crossings. */
-export function occurrenceDaysOf(occurrence: Occurrence): OccurrenceDays {
+export function occurrenceDaysOf(occurrence: Occurrence | SkyMarkerOccurrence): OccurrenceDays {
   return {
     expected: labelled(occurrence.expected),
     early: occurrence.early && labelled(occurrence.early),

@@ -1,4 +1,12 @@
-import type { Phenomenon, PhenomenonOutcome, SkyNote, StarOutcome } from '#shared/sky/index.js';
+import type {
+  Phenomenon,
+  PhenomenonOutcome,
+  SkyMarkerOutcome,
+  SkyMarkerReason,
+  SkyMarkerSpec,
+  SkyNote,
+  StarOutcome,
+} from '#shared/sky/index.js';
 import type { IsoDate } from '#shared/kernel/iso-date.js';
 
 /**
@@ -12,6 +20,7 @@ export interface MonthDay {
 
 export type EntryLead =
   | { type: 'marker'; markerKey: string; phenomenon: Phenomenon; occurrence: 1 | 2 }
+  | { type: 'sky'; spec: SkyMarkerSpec; occurrence: 1 | 2 }
   | { type: 'fixed-date'; date: MonthDay; source: string };
 
 /** Days from the lead day, in order. */
@@ -37,6 +46,7 @@ export interface EntryTiming {
 export const ENTRY_WARNINGS = [
   'no-date-this-year',
   'star-does-not-serve',
+  'sign-not-here',
   'one-occurrence-only',
   'weak-marker',
   'never-disappears',
@@ -74,6 +84,8 @@ export interface OccurrenceDays {
 export interface EntryDates {
   starOutcome: StarOutcome | null;
   phenomenonOutcome: PhenomenonOutcome | null;
+  /** Only where a marker beyond a star's first and last days leads. */
+  sky?: { outcome: SkyMarkerOutcome; reason: SkyMarkerReason | null } | undefined;
   marker: OccurrenceDays | null;
   window: EntryWindow | null;
   warnings: EntryWarning[];

@@ -2,8 +2,14 @@ import { z } from 'zod';
 import { id, instant, isoDate, line, listOf, monthDay, rowVersion, text } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
 import { ROLES } from './people.js';
+import { skyMarkerSpec } from './sky-markers.js';
 import { markerKey, occurrenceDays, phenomenon } from './stars.js';
-import { PHENOMENON_OUTCOMES, STAR_OUTCOMES } from '../sky/vocabulary.js';
+import {
+  PHENOMENON_OUTCOMES,
+  SKY_MARKER_OUTCOMES,
+  SKY_MARKER_REASONS,
+  STAR_OUTCOMES,
+} from '../sky/vocabulary.js';
 
 /** Calendars are made for these civil Gregorian years. */
 export const CALENDAR_FIRST_YEAR = 1900;
@@ -57,14 +63,13 @@ export const SHARING_LEVELS = ['open', 'village'] as const;
 export const sharingLevel = z.enum(SHARING_LEVELS);
 export type SharingLevel = (typeof SHARING_LEVELS)[number];
 
+/** Which of the year's occurrences, where there are two. */
+const occurrence = z.union([z.literal(1), z.literal(2)]);
+
 export const entryLead = z.discriminatedUnion('type', [
-  z.strictObject({
-    type: z.literal('marker'),
-    markerKey,
-    phenomenon,
-    /** Which of the year's occurrences, where there are two. */
-    occurrence: z.union([z.literal(1), z.literal(2)]),
-  }),
+  z.strictObject({ type: z.literal('marker'), markerKey, phenomenon, occurrence }),
+  /** A marker beyond a star's first and last days: Sun, nights, culminations. */
+  z.strictObject({ type: z.literal('sky'), spec: skyMarkerSpec, occurrence }),
   z.strictObject({ type: z.literal('fixed-date'), date: monthDay, source: line(200, 1) }),
 ]);
 export type EntryLead = z.infer<typeof entryLead>;
@@ -142,6 +147,7 @@ export type EntryUpdate = z.infer<typeof entryUpdate>;
 export const ENTRY_WARNINGS = [
   'no-date-this-year',
   'star-does-not-serve',
+  'sign-not-here',
   'one-occurrence-only',
   'weak-marker',
   'never-disappears',
@@ -168,6 +174,10 @@ export type EntryWindow = z.infer<typeof entryWindow>;
 export const entryDates = z.strictObject({
   starOutcome: z.enum(STAR_OUTCOMES).nullable(),
   phenomenonOutcome: z.enum(PHENOMENON_OUTCOMES).nullable(),
+  /** Only where a sign beyond a star's first and last days leads, so that what was frozen before it stays as it is. */
+  sky: z
+    .strictObject({ outcome: z.enum(SKY_MARKER_OUTCOMES), reason: z.enum(SKY_MARKER_REASONS).nullable() })
+    .optional(),
   /** The occurrence that leads; null for a fixed date or where there is none. */
   marker: occurrenceDays.nullable(),
   /** Null where the leading marker has no date, or the last date closes the window. */

@@ -11,6 +11,7 @@ import { placesEndpoints } from './places.js';
 import { reviewsEndpoints } from './reviews.js';
 import { sessionEndpoints } from './session.js';
 import { sheetsEndpoints } from './sheets.js';
+import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
 import { todayEndpoints } from './today.js';
 import { versionsEndpoints } from './versions.js';
@@ -22,6 +23,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   peopleEndpoints,
   placesEndpoints,
   starsEndpoints,
+  skyMarkersEndpoints,
   finderEndpoints,
   driftEndpoints,
   moonsEndpoints,

@@ -38,6 +38,7 @@ import { type PreparedYear, prepareYear as prepare } from './phenomena/prepared-
 import type { Ground } from './phenomena/skyline-crossing.js';
 import { watchTimesOf } from './phenomena/watch-times.js';
 import { preparedYearOf } from './phenomena/year-cache.js';
+import { assertSkyMarkerSpec, skyMarkerYearOf } from './sky-markers/sky-marker-year.js';
 import { dayClockOf, labelledDay } from './time/civil-day.js';
 import { FIRST_GREGORIAN_YEAR } from './time/civil-year.js';
 import {
@@ -60,6 +61,8 @@ import type {
   MoonPhase,
   Site,
   SkylinePoint,
+  SkyMarkerSpec,
+  SkyMarkerYear,
   StripSegment,
   VisibilitySettings,
   WatchTimes,
@@ -207,6 +210,23 @@ export function yearStrip(markerYear: MarkerYear, site: Site, settings: Visibili
   assertYear(markerYear.year);
   const placeYear = placeYearOf(preparedYearOf(markerYear.year), site, settings);
   return yearStripOf(markerAtPlace(placeYear, markerOf(markerYear.markerKey)));
+}
+
+/**
+ * The year of a marker beyond a star's first and last days (a culmination, the Sun at a point of the skyline, the light
+ * nights …): its days with ranges, or the reason why there are none. Sources and accuracy: the file of its kind.
+ */
+export function computeSkyMarker(
+  spec: SkyMarkerSpec,
+  site: Site,
+  settings: VisibilitySettings,
+  year: number,
+): SkyMarkerYear {
+  assertSkyMarkerSpec(spec);
+  assertSite(site);
+  assertSettings(settings);
+  assertYear(year);
+  return skyMarkerYearOf(spec, { ...placeYearOf(preparedYearOf(year), site, settings), site });
 }
 
 /** The civil year that a day belongs to, if the engine offers it. */

@@ -230,3 +230,5 @@ export interface MoonOverPlace {
   /** Of its centre above the mathematical horizon, without refraction. */
   altitudeDeg: number;
 }
+
+export type * from './sky-markers/types.js';

@@ -26,6 +26,7 @@ export const SKY_NOTES = [
   'weak-marker',
   'lost-in-light-nights',
   'threshold-extrapolated',
+  'standstill',
 ] as const;
 export type SkyNote = (typeof SKY_NOTES)[number];
 
@@ -111,3 +112,5 @@ export const LAST_YEAR = 3000;
 export const ENGINE_VERSION = '1.1.0';
 
 export * from './moon/words.js';
+export { skyMarkerTimeOf } from './sky-markers/time-of.js';
+export * from './sky-markers/words.js';

@@ -1,10 +1,10 @@
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
-import type { MarkerNames } from '#shared/contracts/stars.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { useDateWords } from './date-words.js';
-import { markerName } from './marker-names.js';
+import { markerName, type NamesByKey } from './marker-names.js';
+import { useSkySignWords } from './sky-sign-words.js';
 
 /** Day numbers of a window, for pictures. */
 export interface WindowDayNumbers {
@@ -23,7 +23,7 @@ export function windowDayNumbers(window: EntryWindow): WindowDayNumbers {
   };
 }
 
-export type NamesByKey = ReadonlyMap<string, Pick<MarkerNames, 'name' | 'designation' | 'hr'>>;
+export type { NamesByKey };
 
 /** What is said about an entry wherever it is shown. Needs the texts `calendars` and `sky`. */
 export interface EntryWords {
@@ -43,11 +43,17 @@ const ANY_YEAR = 2027;
 export function useEntryWords(): EntryWords {
   const { t } = useTranslation(['calendars', 'sky']);
   const dates = useDateWords();
+  const sign = useSkySignWords();
   return useMemo(() => {
     const leadWords = (group: 'lead' | 'leadAlone', lead: EntryLead, markers: NamesByKey) => {
       if (lead.type === 'fixed-date') {
         const day = dates.day({ year: ANY_YEAR, ...lead.date });
         return t(`${group}.fixed`, { day, source: lead.source });
+      }
+      if (lead.type === 'sky') {
+        return t(`${group}.${lead.occurrence === 2 ? 'skySecond' : 'sky'}`, {
+          sign: sign(lead.spec, markers),
+        });
       }
       if (lead.markerKey === '') return t(`${group}.none`);
       const names = markers.get(lead.markerKey);
@@ -75,5 +81,5 @@ export function useEntryWords(): EntryWords {
       lead: ({ lead }, markers) => leadWords('lead', lead, markers),
       leadAlone: ({ lead }, markers) => leadWords('leadAlone', lead, markers),
     };
-  }, [t, dates]);
+  }, [t, dates, sign]);
 }

@@ -179,6 +179,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
       years: [2027],
       markers: [{ markerKey: 'pleiades', phenomenon: 'heliacal-rising' }],
     }),
+    computeSkyMarker: () => ({ year: 2027, spec: { kind: 'zenith-sun' } }),
     createCalendar: () => ({ placeId: village.place.id, year: 2031 }),
     addEntry: () => entryInput(),
     updateEntry: () => ({ content: entryInput(), ...stale }),

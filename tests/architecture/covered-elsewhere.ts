@@ -19,5 +19,9 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/sky/look/body-places.ts': 'tests/reference/against-ephem-bodies.test.ts',
   'shared/sky/look/look-path.ts': 'tests/unit/shared/sky/look/look-at.test.ts',
   'shared/sky/look/sky-at.ts': 'tests/reference/against-erfa-horizontal.test.ts',
-  'shared/sky/phenomena/sun-place.ts': 'tests/unit/shared/sky/look/watch-window.test.ts',
+  'shared/sky/phenomena/sun-place.ts': 'tests/unit/shared/sky/phenomena/sun-day.test.ts',
+  'shared/sky/sky-markers/kind.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
+  'shared/sky/sky-markers/sky-hour.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
+  'shared/sky/sky-markers/spec-checks.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
+  'shared/sky/sky-markers/star-look.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
 };

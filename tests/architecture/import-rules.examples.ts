@@ -34,6 +34,7 @@ export const forbidden: readonly Forbidden[] = [
   ...breaks('sky-upward-markers', 'shared/sky/markers/marker.ts', 'shared/sky/look/look.ts'),
   ...breaks('sky-upward-look', 'shared/sky/look/look.ts', 'shared/sky/moon/month.ts'),
   ...breaks('sky-upward-moon', 'shared/sky/moon/month.ts', 'shared/sky/planets/venus.ts'),
+  ...breaks('sky-upward-planets', 'shared/sky/planets/venus.ts', 'shared/sky/sky-markers/noon.ts'),
   ...breaks('sky-layers-below-the-door', 'shared/sky/markers/marker.ts', 'shared/sky/index.ts'),
   ...breaks('sky-through-its-door', 'server/features/stars/stars.service.ts', 'shared/sky/stars/star.ts'),
   ...breaks('sky-through-its-door', 'src/features/stars/strip.tsx', 'shared/sky/time/day.ts'),

@@ -16,7 +16,7 @@ import { personNames } from '../people/person-names.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
 import { lockOpenDraft, readDraft, recordContribution } from './draft.service.js';
-import { knowsMarker, type SkyDatesService } from './sky-dates.service.js';
+import { knowsMarker, markerKeyOfLead, type SkyDatesService } from './sky-dates.service.js';
 
 /** The draft's entries. Each change waits for the calendar's lock and is refused while a submission is out. */
 export class EntriesService {
@@ -32,7 +32,7 @@ export class EntriesService {
   }
 
   async add(actor: Actor, calendarId: string, content: EntryInput): Promise<Entry> {
-    expectKnownMarker(content, 'lead.markerKey');
+    expectKnownMarker(content, 'lead');
     return this.change(calendarId, async (manager, calendar) => {
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
@@ -44,7 +44,7 @@ export class EntriesService {
 
   /** Saving what is stored already changes nothing: no new version, and nobody becomes a writer by it. */
   async update(actor: Actor, calendarId: string, entryId: string, input: EntryUpdate): Promise<Entry> {
-    expectKnownMarker(input.content, 'content.lead.markerKey');
+    expectKnownMarker(input.content, 'content.lead');
     return this.change(calendarId, async (manager, calendar) => {
       const row = await liveEntry(manager, calendarId, entryId);
       if (row.version !== input.version) throw stale(await this.one(manager, calendar, entryId), input);
@@ -201,8 +201,14 @@ async function liveEntry(manager: EntityManager, calendarId: string, entryId: st
   return row;
 }
 
+/** @param field where the lead stands in the request */
 function expectKnownMarker({ lead }: EntryInput, field: string): void {
-  if (lead.type === 'marker' && !knowsMarker(lead.markerKey)) throw invalidField(field, 'unknown-marker');
+  const markerKey = markerKeyOfLead(lead);
+  if (markerKey === null || knowsMarker(markerKey)) return;
+  throw invalidField(
+    lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
+    'unknown-marker',
+  );
 }
 
 /** Names of the fields that differ; what stands in them stays out of the record. */

@@ -1,30 +1,37 @@
 import { entryDatesOf } from '#shared/calendar/entry-dates.js';
-import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
+import type { EntryDates, EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { FrozenMarker } from '#shared/contracts/versions.js';
 import { resolveMarker } from '#shared/sky/index.js';
 import type { WatchedPlace } from '../places/watched-place.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
+import { SkyMarkerYearsService } from '../sky-markers/sky-marker-years.service.js';
 import { SkyYearsService } from '../stars/sky-years.service.js';
 
 /** What the sky gives the entries of a calendar. Each marker's year is computed once, however many go by it. */
 export class SkyDatesService {
-  constructor(private readonly years = new SkyYearsService()) {}
+  constructor(
+    private readonly years = new SkyYearsService(),
+    private readonly skyMarkers = new SkyMarkerYearsService(),
+  ) {}
 
   /** Dates of entries in their order. Every marker must be in the table; see `knowsMarker`. */
   datesOf(place: WatchedPlace, year: number, contents: readonly EntryInput[]): EntryDates[] {
     const markerYears = new Map(
       this.years
-        .markerYears(place, year, markerKeysOf(contents))
+        .markerYears(place, year, firstAndLastKeysOf(contents))
         .map((markerYear) => [markerYear.markerKey, markerYear]),
     );
     return contents.map((content) => {
       const { lead } = content;
+      if (lead.type === 'sky') {
+        return entryDatesOf(content, year, this.skyMarkers.year(place, year, lead.spec));
+      }
       const markerYear = lead.type === 'marker' ? (markerYears.get(lead.markerKey) ?? null) : null;
       return entryDatesOf(content, year, markerYear);
     });
   }
 
-  /** The markers that entries go by, each once and in the order of the keys, with names and the year's strip. */
+  /** The stars and figures that entries go by, each once and in the order of the keys, with names and the year's strip. */
   frozenMarkers(place: WatchedPlace, year: number, contents: readonly EntryInput[]): FrozenMarker[] {
     return markerKeysOf(contents).map((key) => ({
       ...markerNamesOf(key),
@@ -38,7 +45,17 @@ export function knowsMarker(markerKey: string): boolean {
   return resolveMarker(markerKey) !== null;
 }
 
+/** The star or figure that a lead names, for whatever it goes by it; null where none is named. */
+export function markerKeyOfLead(lead: EntryLead): string | null {
+  if (lead.type === 'marker') return lead.markerKey;
+  return lead.type === 'sky' && 'markerKey' in lead.spec ? lead.spec.markerKey : null;
+}
+
 function markerKeysOf(contents: readonly EntryInput[]): string[] {
-  const keys = contents.flatMap(({ lead }) => (lead.type === 'marker' ? [lead.markerKey] : []));
-  return [...new Set(keys)].sort();
+  return [...new Set(contents.flatMap(({ lead }) => markerKeyOfLead(lead) ?? []))].sort();
+}
+
+/** Only those whose first or last days are asked for. */
+function firstAndLastKeysOf(contents: readonly EntryInput[]): string[] {
+  return markerKeysOf(contents.filter(({ lead }) => lead.type === 'marker'));
 }

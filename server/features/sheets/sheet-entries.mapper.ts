@@ -12,6 +12,7 @@ export function mayBePrinted({ kind, agreedToPrint }: EntryInput): boolean {
 
 export interface EntryTexts {
   files: Translate;
+  sky: Translate;
   words: SheetWords;
 }
 
@@ -49,7 +50,7 @@ export function toSheetEntries(
 
 /** What is nothing but a marker stands among the markers, unless it has more to say. */
 function needsALine({ kind, lead, otherSigns, ifLate, caution, hasLastDate }: EntryInput): boolean {
-  if (kind !== 'marker-only' || lead.type !== 'marker') return true;
+  if (kind !== 'marker-only' || lead.type === 'fixed-date') return true;
   return hasLastDate || [otherSigns, ifLate, caution].some((text) => text !== '');
 }
 
@@ -72,13 +73,14 @@ function lastAdvisedOf({ content, dates: { window } }: Body, year: number): Shee
   };
 }
 
-function reason({ content, dates }: Body, year: number, { files, words }: EntryTexts): string | null {
+function reason({ content, dates }: Body, year: number, texts: EntryTexts): string | null {
+  const { files, words } = texts;
   const { lastDate } = content;
   if (lastDate !== null && dates.warnings.includes('window-closed-by-last-date')) {
     const date = words.day(dateIn(year, lastDate.date));
     return files('sheet.noDate.closed', { date, source: lastDate.source });
   }
-  return whyNoDate(dates, year, files);
+  return whyNoDate(dates, year, texts);
 }
 
 function dateIn(year: number, { month, day }: { month: number; day: number }): string {

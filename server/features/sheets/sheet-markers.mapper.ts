@@ -1,19 +1,21 @@
 import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { FrozenMarker, VersionEntryBody } from '#shared/contracts/versions.js';
-import type { IconKey } from '#shared/sheet/icons.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
+import { skySign } from '#shared/calendar/sky-sign.js';
+import { compassPoint } from '#shared/sky/index.js';
+import { markerIconKey, skySignIconKey } from '#shared/sheet/lead-icons.js';
 import type { Label, SheetMarker } from '#shared/sheet/sheet-model.js';
+import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import type { Translate } from '../../print/translator.js';
 import { whyNoDate } from './why-no-date.js';
 
-type MarkerLead = Extract<EntryInput['lead'], { type: 'marker' }>;
+type SkyLed = Exclude<EntryInput['lead'], { type: 'fixed-date' }>;
+type MarkerLead = Extract<SkyLed, { type: 'marker' }>;
 
 export interface MarkerTexts {
   files: Translate;
   sky: Translate;
 }
-
-/** Figures that have a drawing of their own. */
-const FIGURE_ICONS: Readonly<Record<string, IconKey>> = { pleiades: 'cluster', 'orion-belt': 'row' };
 
 /**
  * What the printed entries go by, each once, by date and lettered in that order. An entry that is nothing but a
@@ -26,11 +28,11 @@ export function toSheetMarkers(
   texts: MarkerTexts,
 ): SheetMarker[] {
   const names = new Map(frozen.map((marker) => [marker.markerKey, marker]));
-  const found = new Map<string, { lead: MarkerLead; dates: EntryDates; titles: Label | null }>();
+  const found = new Map<string, { lead: SkyLed; dates: EntryDates; titles: Label | null }>();
   for (const { content, dates } of bodies) {
     const { lead } = content;
-    if (lead.type !== 'marker') continue;
-    const key = `${lead.markerKey} ${lead.phenomenon} ${lead.occurrence}`;
+    if (lead.type === 'fixed-date') continue;
+    const key = canonicalJson(lead);
     const titles =
       content.kind === 'marker-only'
         ? { village: content.titleVillage, officer: content.titleOfficer }
@@ -40,22 +42,55 @@ export function toSheetMarkers(
   }
   return [...found.values()]
     .sort((a, b) => dayOf(a.dates) - dayOf(b.dates))
-    .map(({ lead, dates, titles }, index) => {
-      const marker = names.get(lead.markerKey);
-      return {
-        letter: letterOf(index),
-        key: lead.markerKey,
-        icon: FIGURE_ICONS[lead.markerKey] ?? 'star',
-        titles: titles ?? { village: '', officer: titleOf(lead, dates, marker, texts) },
-        phenomenon: texts.sky(`phenomenonTitle.${lead.phenomenon}`),
-        light:
-          lead.phenomenon === 'heliacal-rising' || lead.phenomenon === 'cosmical-setting' ? 'dawn' : 'dusk',
-        expected: dates.marker?.expected.gregorian ?? null,
-        early: dates.marker?.early?.gregorian ?? null,
-        late: dates.marker?.late?.gregorian ?? null,
-        whyNoDate: dates.marker ? null : whyNoDate(dates, year, texts.files),
-      };
-    });
+    .map(({ lead, dates, titles }, index) => ({
+      letter: letterOf(index),
+      ...(lead.type === 'sky'
+        ? signWords(lead.spec, titles, names, texts)
+        : starWords(lead, dates, titles, names.get(lead.markerKey), texts)),
+      expected: dates.marker?.expected.gregorian ?? null,
+      early: dates.marker?.early?.gregorian ?? null,
+      late: dates.marker?.late?.gregorian ?? null,
+      whyNoDate: dates.marker ? null : whyNoDate(dates, year, texts),
+    }));
+}
+
+type MarkerWords = Pick<SheetMarker, 'key' | 'icon' | 'titles' | 'phenomenon' | 'light'>;
+
+function starWords(
+  lead: MarkerLead,
+  dates: EntryDates,
+  titles: Label | null,
+  marker: FrozenMarker | undefined,
+  texts: MarkerTexts,
+): MarkerWords {
+  const isMorning = lead.phenomenon === 'heliacal-rising' || lead.phenomenon === 'cosmical-setting';
+  return {
+    key: lead.markerKey,
+    icon: markerIconKey(lead.markerKey),
+    titles: titles ?? { village: '', officer: titleOf(lead, dates, marker, texts) },
+    phenomenon: texts.sky(`phenomenonTitle.${lead.phenomenon}`),
+    light: isMorning ? 'dawn' : 'dusk',
+  };
+}
+
+/** A sign's name says everything; where the village's words stand in its place, it goes beside the date. */
+function signWords(
+  spec: Extract<SkyLed, { type: 'sky' }>['spec'],
+  titles: Label | null,
+  names: ReadonlyMap<string, FrozenMarker>,
+  { sky }: MarkerTexts,
+): MarkerWords {
+  const marker = 'markerKey' in spec ? names.get(spec.markerKey) : undefined;
+  const starName = marker?.name === '' ? marker.designation : (marker?.name ?? '');
+  const sign = skySign(spec, starName, { t: sky, compassPoint });
+  const time = skyMarkerTimeOf(spec);
+  return {
+    key: spec.kind,
+    icon: skySignIconKey(spec),
+    titles: titles ?? { village: '', officer: sign },
+    phenomenon: titles ? sign : sky(`signTimeTitle.${time}`),
+    light: time === 'evening' || time === 'night' ? 'dusk' : 'dawn',
+  };
 }
 
 /** A star that is never hidden comes back from nowhere, so "returns" would not be true of it. */

@@ -27,6 +27,7 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
   const language = printLanguage(header.officerLanguage.tag);
   const files = translatorFor(language, 'files');
   const print = translatorFor(language, 'print');
+  const sky = translatorFor(language, 'sky');
   const words = sheetWords({ translate: print, language, year });
   const printed = facts.entries.filter(({ content }) => mayBePrinted(content));
   return {
@@ -40,11 +41,8 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     stateWatermark: state === 'published' ? null : print(`state.${state ?? 'draft'}`),
     officerLanguage: language,
     villageLanguage: header.villageLanguage.tag,
-    markers: toSheetMarkers(printed, header.markers, year, {
-      files,
-      sky: translatorFor(language, 'sky'),
-    }),
-    entries: toSheetEntries(printed, year, { files, words }),
+    markers: toSheetMarkers(printed, header.markers, year, { files, sky }),
+    entries: toSheetEntries(printed, year, { files, sky, words }),
     moon: moonOf(header),
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
     basis: [basisOf(header, files)],

@@ -20,6 +20,7 @@ export const texts = {
     notes: 'notes',
     note: {
       'never-disappears': 'never hidden, so no return to wait for',
+      standstill: 'stands still near this day',
       'weak-marker': 'weak marker: its range is over three weeks',
       'lost-in-light-nights': 'lost in light nights',
       'threshold-extrapolated': 'the eye-and-air rule was stretched beyond its data',

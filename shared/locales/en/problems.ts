@@ -96,6 +96,9 @@ export const texts = {
     'too-many': 'These are too many at a time.',
     'moon-month': 'Give a month from 1 to 12.',
     'marker-key': 'This is no marker. Choose one from the list of stars.',
+    'sky-hour': 'An hour by the Sun lies between 0 and 23:45, in quarters of an hour.',
+    'sky-minutes': 'Give whole minutes, from 15 to 240.',
+    'star-altitude': 'A height lies between 5 and 85 degrees.',
     'unknown-marker': 'This star or figure is not in the table. Choose one from the list.',
     'offset-range': 'Days count from −366 to 366.',
     'window-order':

@@ -37,6 +37,88 @@ export const texts = {
     watch: 'watch',
     fixed: 'a fixed date',
   },
+  /** Signs beyond a star's first and last days: how each is called. */
+  sign: {
+    culmination: {
+      dusk: '{{star}} highest at dusk, the Sun {{depth}}° down',
+      dawn: '{{star}} highest at dawn, the Sun {{depth}}° down',
+    },
+    'star-altitude': {
+      east: {
+        'after-sunset_one': '{{star}} {{altitude}}° up in the east, {{count}} minute after sunset',
+        'after-sunset_other': '{{star}} {{altitude}}° up in the east, {{count}} minutes after sunset',
+        'before-sunrise_one': '{{star}} {{altitude}}° up in the east, {{count}} minute before sunrise',
+        'before-sunrise_other': '{{star}} {{altitude}}° up in the east, {{count}} minutes before sunrise',
+        'solar-hour': '{{star}} {{altitude}}° up in the east at {{hour}} by the Sun',
+      },
+      west: {
+        'after-sunset_one': '{{star}} {{altitude}}° up in the west, {{count}} minute after sunset',
+        'after-sunset_other': '{{star}} {{altitude}}° up in the west, {{count}} minutes after sunset',
+        'before-sunrise_one': '{{star}} {{altitude}}° up in the west, {{count}} minute before sunrise',
+        'before-sunrise_other': '{{star}} {{altitude}}° up in the west, {{count}} minutes before sunrise',
+        'solar-hour': '{{star}} {{altitude}}° up in the west at {{hour}} by the Sun',
+      },
+    },
+    'due-meridian': {
+      south: '{{star}} due south at {{hour}} by the Sun',
+      north: '{{star}} due north at {{hour}} by the Sun',
+    },
+    'about-pole': {
+      lowest: '{{star}} straight below the pole at {{hour}} by the Sun',
+      highest: '{{star}} straight above the pole at {{hour}} by the Sun',
+      left: '{{star}} left of the pole at {{hour}} by the Sun',
+      right: '{{star}} right of the pole at {{hour}} by the Sun',
+    },
+    'sun-season': {
+      'march-equinox': 'March equinox, day and night alike',
+      'june-solstice': 'June solstice, the Sun turns back',
+      'september-equinox': 'September equinox, day and night alike',
+      'december-solstice': 'December solstice, the Sun turns back',
+    },
+    'sun-azimuth': {
+      sunrise: { named: 'Sunrise over {{point}}', plain: 'Sunrise in the {{compass}}, at {{azimuth}}°' },
+      sunset: { named: 'Sunset over {{point}}', plain: 'Sunset in the {{compass}}, at {{azimuth}}°' },
+    },
+    'noon-sun': {
+      back: { named: 'Noon Sun back over {{ridge}}', plain: 'Noon Sun back over the skyline' },
+      gone: { named: 'Noon Sun last seen over {{ridge}}', plain: 'Noon Sun last seen over the skyline' },
+    },
+    'zenith-sun': 'Sun overhead at noon, no shadow',
+    'dark-night': {
+      last: {
+        6: 'Last star night',
+        12: 'Last night with all but the faintest stars',
+        18: 'Last night dark enough for the Milky Way',
+      },
+      first: {
+        6: 'First star night',
+        12: 'First night with all but the faintest stars',
+        18: 'First night dark enough for the Milky Way',
+      },
+    },
+  },
+  /** Why such a sign has no day; a whole sentence. */
+  noSign: {
+    'not-in-this-year': 'It does not fall in this year.',
+    'star-below-skyline': 'The star stays below the skyline at that moment.',
+    'star-passes-other-side': 'The star is highest on the other side of the sky here.',
+    'altitude-not-reached': 'The star never passes that height at that hour here.',
+    'too-light': 'The sky is too light at that moment.',
+    'azimuth-not-reached': 'The Sun never comes to that point of the skyline here.',
+    'noon-sun-always-clears': 'The noon Sun clears the skyline all year here.',
+    'noon-sun-never-clears': 'The noon Sun never clears the skyline here.',
+    'sun-never-overhead': 'The Sun never stands overhead here.',
+    'nights-always-dark': 'The nights are never lighter than that here.',
+    'nights-never-dark': 'The nights never get so dark here.',
+  },
+  /** What a date of such a sign belongs to; stands before the date. */
+  signTimeTitle: {
+    morning: 'On the morning',
+    noon: 'At noon',
+    evening: 'On the evening',
+    night: 'In the night',
+    day: 'The day',
+  },
   compass: {
     n: 'north',
     nne: 'north-north-east',

@@ -166,6 +166,7 @@ export const texts = {
     flatEarlier_other: 'On flat ground it would be about {{day}}: the hills make it {{count}} days earlier.',
     note: {
       'never-disappears': 'The star is never hidden here, so this is no return.',
+      standstill: 'Near this day the Sun stands still on the skyline, so no single day can be told.',
       'weak-marker':
         'A weak marker: its range is longer than three weeks. Do not tie a day’s work to it alone.',
       'lost-in-light-nights':

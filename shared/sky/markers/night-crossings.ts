@@ -55,7 +55,7 @@ export function sameSideNeeded(
  * Sine of the depth needed for a star high in the sky. Its altitude counts under either skyline rule, because no skyline
  * is being crossed: a star that stands high is seen in a lighter sky.
  */
-function neededUpThere(marker: MarkerAtPlace, altitudeRad: number, night: number): number {
+export function neededUpThere(marker: MarkerAtPlace, altitudeRad: number, night: number): number {
   const clarity = clarityOfNight(marker, night);
   const thresholdDeg =
     marker.threshold.sameSideDeg + placeShiftDeg(marker, 'same') + CLARITY_SHIFT_DEG[clarity];

@@ -1,23 +1,19 @@
 import type { WatchTimes } from '../types.js';
 import { levelSkyline, type Skyline } from '../horizon/skyline.js';
-import { refractionDeg } from '../horizon/refraction.js';
-import { DEG_PER_RAD, RAD_PER_DEG, TAU } from '../units/angle.js';
+import { TAU } from '../units/angle.js';
 import type { PreparedYear } from './prepared-year.js';
 import type { Ground } from './skyline-crossing.js';
+import { edgeClearanceRad } from './sun-day.js';
 import { sunPlaceAt } from './sun-place.js';
 
 /** Eyes and optics must be off the Sun's place well before it shows [safety margin of the product, not astronomy]. */
 const MARGIN_DAYS = 10 / 1440;
-const SUN_RADIUS_DEG = 16 / 60;
 const STEP_DAYS = 2 / 1440;
 const PRECISION_DAYS = 1 / 86_400;
 
 /** How far the Sun's upper edge stands above a skyline, with refraction, radians. */
 function edgeClearance(year: PreparedYear, ground: Ground, skyline: Skyline, jdUt: number): number {
-  const sun = sunPlaceAt(year, ground, jdUt);
-  const skylineRad = skyline.altitudeRad(sun.azimuthRad);
-  const liftRad = (refractionDeg(skylineRad * DEG_PER_RAD) + SUN_RADIUS_DEG) * RAD_PER_DEG;
-  return sun.altitudeRad - (skylineRad - liftRad);
+  return edgeClearanceRad({ ...ground, skyline }, sunPlaceAt(year, ground, jdUt));
 }
 
 /** First instant after `from` (before it when `to` is earlier) at which the Sun's edge is over the skyline. */

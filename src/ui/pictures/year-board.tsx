@@ -2,8 +2,10 @@ import type { ReactNode } from 'react';
 import { Peg } from '../pegs.js';
 import { percent, startPercent, type DaySpan } from './day-span.js';
 import { DayHandles, type HandleWords, type MovePart } from './day-handles.js';
+import { MarkLane } from './mark-lane.js';
 import { MonthLines, MonthScale, type ScaleMonth } from './month-scale.js';
 import { packBars, type PlacedBar } from './pack-bars.js';
+import type { RangeMark } from './ring-row.js';
 import { useTextWidth } from './use-text-width.js';
 import { useWidth } from '../use-width.js';
 import { WindowShape, type WindowDays } from './window-bar.js';
@@ -14,7 +16,10 @@ export interface BoardLane {
   key: string;
   name: string;
   icon?: ReactNode;
-  segments: readonly LaneSegment[];
+  /** A star's states through the year. */
+  segments?: readonly LaneSegment[] | undefined;
+  /** Instead of them: single days with their ranges. */
+  marks?: readonly RangeMark[] | undefined;
   /** The lane as a sentence. */
   label: string;
 }
@@ -110,7 +115,11 @@ export function YearBoard(props: YearBoardProps) {
         <MonthLines span={span} months={months} />
         {lanes.map((lane, index) => (
           <div key={lane.key} className="year-board-lane" style={{ top: lanesTop + index * LANE_PITCH }}>
-            <YearLane span={span} segments={lane.segments} label={lane.label} height={LANE_HEIGHT} />
+            {lane.marks ? (
+              <MarkLane span={span} marks={lane.marks} label={lane.label} height={LANE_HEIGHT} />
+            ) : (
+              <YearLane span={span} segments={lane.segments ?? []} label={lane.label} height={LANE_HEIGHT} />
+            )}
           </div>
         ))}
         <svg className="year-board-over" role="img" aria-label={label} width="100%" height={height}>

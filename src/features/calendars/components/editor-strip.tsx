@@ -5,8 +5,9 @@ import { dayNumberOf, todayIn } from '#src/lib/days.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { useLaneWords } from '#src/lib/lane-words.js';
 import { listWords } from '#src/lib/list-words.js';
-import { markerName } from '#src/lib/marker-names.js';
+import { markerName, type NamesByKey } from '#src/lib/marker-names.js';
 import { More } from '#src/ui/fold.js';
+import { useSignLanes } from '#src/lib/sign-lanes.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
 import type { MovePart } from '#src/ui/pictures/day-handles.js';
@@ -19,6 +20,8 @@ import type { Editor } from '../model/use-editor.js';
 import { yearSpan } from '../model/year-span.js';
 import { StripTable } from './strip-table.js';
 
+const NO_NAMES: NamesByKey = new Map();
+
 /** The year above the list and the form: every star in use as a lane, every entry as a bar. */
 export function EditorStrip({ editor, form }: { editor: Editor; form: FormState | null }) {
   const { t, i18n } = useTranslation(['calendars', 'sky']);
@@ -29,6 +32,7 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
   const { calendar, shown, selected, markers, selection, canWrite } = editor;
   const { year } = calendar;
   const byKey = markers.data?.byKey ?? null;
+  const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
   const nameOf = (entry: ShownEntry) => entry.content.titleOfficer || t('editor.untitled');
   const undated = undatedOf(shown);
   const label =
@@ -38,20 +42,23 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
           year,
           count: shown.length,
           title: nameOf(selected),
-          lead: words.lead(selected.content, byKey ?? new Map()),
+          lead: words.lead(selected.content, byKey ?? NO_NAMES),
         });
   return (
     <section className="board mb-4" aria-label={t('strip.label')}>
       <YearBoard
         span={yearSpan(year)}
         months={dates.months(year)}
-        lanes={lanesOf(shown, byKey).map((row) => ({
-          key: row.markerKey,
-          name: markerName(row),
-          icon: <MarkerIcon markerKey={row.markerKey} size={20} />,
-          segments: row.strip,
-          label: laneWords(markerName(row), row.strip),
-        }))}
+        lanes={[
+          ...lanesOf(shown, byKey).map((row) => ({
+            key: row.markerKey,
+            name: markerName(row),
+            icon: <MarkerIcon markerKey={row.markerKey} size={20} />,
+            segments: row.strip,
+            label: laneWords(markerName(row), row.strip),
+          })),
+          ...signLanes,
+        ]}
         bars={barsOf(shown, nameOf)}
         barsName={t('strip.work')}
         label={label}

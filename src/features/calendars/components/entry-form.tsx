@@ -167,6 +167,7 @@ function GroupFolds({ form, groups, onSearch }: GroupFoldsProps) {
 function goWay(way: Way, form: FormState, groups: Groups, search: () => void): void {
   switch (way.kind) {
     case 'otherStar':
+    case 'otherSign':
       search();
       return;
     case 'fixedDate':

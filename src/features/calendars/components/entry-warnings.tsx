@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import type { EntryWarning } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { listWords } from '#src/lib/list-words.js';
+import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { markerName } from '#src/lib/marker-names.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
@@ -53,6 +54,11 @@ export function EntryWarnings({ form, entry, all, onWay }: EntryWarningsProps) {
   );
 }
 
+/** A sign of the sky has no phenomenon to name. */
+function isSaidOtherwise(warning: EntryWarning): warning is 'no-date-this-year' | 'one-occurrence-only' {
+  return warning === 'no-date-this-year' || warning === 'one-occurrence-only';
+}
+
 function useWarningWords(
   form: FormState,
   entry: ShownEntry,
@@ -61,12 +67,17 @@ function useWarningWords(
   const { t, i18n } = useTranslation(['calendars', 'sky']);
   const dates = useDateWords();
   const { draft, year } = form;
+  const sign = useSkySignWords();
   const row = leadingRow(form);
+  const { lead } = entry.content;
+  const signName = lead.type === 'sky' ? sign(lead.spec, form.markers ?? new Map()) : null;
   const lastDay = dates.day({ year, ...draft.lastDate.date });
   return (warning) =>
-    t(`warning.${warning}`, {
+    t(signName !== null && isSaidOtherwise(warning) ? `warning.sign.${warning}` : `warning.${warning}`, {
       year,
-      marker: row ? markerName(row) : draft.marker.markerKey,
+      sign: signName ?? '',
+      reason: t(`sky:noSign.${entry.dates?.sky?.reason ?? 'not-in-this-year'}`),
+      marker: signName ?? (row ? markerName(row) : draft.marker.markerKey),
       phenomenon: t(`sky:phenomenon.${draft.marker.phenomenon}`),
       day: lastDay,
       others:

@@ -2,12 +2,13 @@ import { useMemo } from 'react';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import type { FieldProblems } from '../model/field-problems.js';
 import type { FormState } from '../model/form-state.js';
+import { signOf } from '../model/signs.js';
 import type { Editor } from '../model/use-editor.js';
 
 /** The form of the entry that is open; null while none is. */
 export function useFormState(editor: Editor, problems: FieldProblems): FormState | null {
   const words = useProblemWords();
-  const { selected, draft, shown, markers, community, calendar, edits, newStart } = editor;
+  const { selected, draft, shown, markers, signs, community, calendar, edits, newStart } = editor;
   const inUse = useMemo(
     () =>
       new Set(
@@ -19,7 +20,6 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
   return {
     calendarId: calendar.id,
     entryId: selected.id,
-    placeId: calendar.placeId,
     draft,
     content: selected.content,
     dates: selected.dates,
@@ -31,7 +31,9 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
       const problem = problems.get(field);
       return problem && words.field(problem.code, problem.message);
     },
+    placeId: calendar.placeId,
     markers: markers.data?.byKey ?? null,
+    sign: draft.leadType === 'sky' ? signOf(signs, draft.sky.spec) : null,
     inUse,
     villageLanguage: community?.villageLanguage ?? null,
     officerLanguage: community?.officerLanguage ?? null,

@@ -1,7 +1,8 @@
 import { useTranslation } from 'react-i18next';
+import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
-import { endOfNight } from '#src/lib/sky-words.js';
+import { endOfLead } from '#src/lib/sky-words.js';
 import { TextField } from '#src/ui/field.js';
 import { PickGroup } from '#src/ui/pick.js';
 import type { FormState } from '../model/form-state.js';
@@ -9,6 +10,7 @@ import { LastDateFields } from './last-date-fields.js';
 import { MarkerFields } from './marker-fields.js';
 import { MonthDayFields } from './month-day-fields.js';
 import { OffsetSteppers } from './offset-steppers.js';
+import { SignFields } from './sign-fields.js';
 import { WindowPicture } from './window-picture.js';
 
 /** When it is done: what leads, four days from it, and what may cut them short. */
@@ -26,14 +28,15 @@ export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () =
         }}
         options={[
           { value: 'marker', label: t('form.byMarker'), note: t('form.byMarkerNote') },
+          ...(draft.leadType === 'sky'
+            ? [{ value: 'sky' as const, label: t('form.bySign'), note: t('form.bySignNote') }]
+            : []),
           { value: 'fixed-date', label: t('form.byDate'), note: t('form.byDateNote') },
         ]}
       />
-      {draft.leadType === 'marker' ? (
-        <MarkerFields form={form} onSearch={onSearch} />
-      ) : (
-        <FixedDateFields form={form} />
-      )}
+      {draft.leadType === 'marker' && <MarkerFields form={form} onSearch={onSearch} />}
+      {draft.leadType === 'sky' && <SignFields form={form} onSearch={onSearch} />}
+      {draft.leadType === 'fixed-date' && <FixedDateFields form={form} />}
       <div className="grid gap-3">
         <p>
           {dates?.marker && <strong>{days.about(dates.marker)}. </strong>}
@@ -51,14 +54,16 @@ export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () =
 function CountedFrom({ form }: { form: FormState }) {
   const { t } = useTranslation('calendars');
   const dateWords = useDateWords();
-  const { draft, dates, year } = form;
+  const { draft, dates, year, content } = form;
   if (draft.leadType === 'fixed-date') {
     return t('form.daysFromDate', { day: dateWords.day({ year, ...draft.fixed.date }) });
   }
   if (!dates?.marker) return t('form.daysFromNothing');
-  return endOfNight(draft.marker.phenomenon) === 'dawn'
-    ? t('form.daysFromMorning')
-    : t('form.daysFromEvening');
+  if (content.lead.type === 'sky') {
+    const time = skyMarkerTimeOf(content.lead.spec);
+    if (time === 'noon' || time === 'day') return t('form.daysFromDay');
+  }
+  return endOfLead(content.lead) === 'dawn' ? t('form.daysFromMorning') : t('form.daysFromEvening');
 }
 
 function FixedDateFields({ form }: { form: FormState }) {

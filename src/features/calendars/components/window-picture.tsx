@@ -2,7 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
-import { endOfNight } from '#src/lib/sky-words.js';
+import { endOfLead } from '#src/lib/sky-words.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import { RangeBracket, RingRow, type RangeMark } from '#src/ui/pictures/ring-row.js';
 import { WindowShape } from '#src/ui/pictures/window-bar.js';
@@ -27,7 +27,7 @@ export function WindowPicture({ form }: { form: FormState }) {
     early: marker.early?.dayNumber ?? null,
     expected: marker.expected.dayNumber,
     late: marker.late?.dayNumber ?? null,
-    side: endOfNight(draft.marker.phenomenon),
+    side: endOfLead(form.content.lead),
   };
   const firsts = [window.earliest, range?.early ?? range?.expected ?? window.earliest];
   const lasts = [window.lastAdvised, range?.late ?? range?.expected ?? window.lastAdvised];

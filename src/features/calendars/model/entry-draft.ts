@@ -9,21 +9,28 @@ import { sameJson } from '#shared/kernel/canonical-json.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
 
 type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
+type SkyLead = Extract<EntryLead, { type: 'sky' }>;
 type FixedLead = Extract<EntryLead, { type: 'fixed-date' }>;
 
 /**
- * An entry while it is being written. It keeps both ways to lead it, and the last date also while the entry is not
+ * An entry while it is being written. It keeps all ways to lead it, and the last date also while the entry is not
  * marked as having one: a change of mind loses nothing. What is saved is `contentOf(draft)`.
  */
 export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate'> {
   leadType: EntryLead['type'];
   /** `markerKey` is empty until a star or figure is chosen. */
   marker: Omit<MarkerLead, 'type'>;
+  /** Without a star until a sign is chosen; see `hasSign`. */
+  sky: Omit<SkyLead, 'type'>;
   fixed: Omit<FixedLead, 'type'>;
   lastDate: FixedLastDate;
 }
 
 const NO_MARKER: EntryDraft['marker'] = { markerKey: '', phenomenon: 'heliacal-rising', occurrence: 1 };
+const NO_SKY: EntryDraft['sky'] = {
+  spec: { kind: 'due-meridian', markerKey: '', facing: 'south', solarHour: 21 },
+  occurrence: 1,
+};
 const NO_FIXED: EntryDraft['fixed'] = { date: { month: 1, day: 1 }, source: '' };
 const FIRST_OFFSETS: EntryOffsets = { earliestDays: 0, bestFromDays: 0, bestToDays: 7, lastAdvisedDays: 14 };
 
@@ -33,17 +40,28 @@ export function draftOf(content: EntryInput): EntryDraft {
     ...rest,
     leadType: lead.type,
     marker: lead.type === 'marker' ? withoutType(lead) : NO_MARKER,
+    sky: lead.type === 'sky' ? withoutType(lead) : NO_SKY,
     fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
     lastDate: lastDate ?? NO_FIXED,
   };
 }
 
+/** Is a sign of the sky chosen? */
+export function hasSign({ spec }: EntryDraft['sky']): boolean {
+  return !('markerKey' in spec) || spec.markerKey !== '';
+}
+
 /** What would be saved. It may still be incomplete; the contract's schema says where. */
 export function contentOf(draft: EntryDraft): EntryInput {
-  const { leadType, marker, fixed, lastDate, ...rest } = draft;
+  const { leadType, marker, sky, fixed, lastDate, ...rest } = draft;
+  const leads: Record<EntryLead['type'], EntryLead> = {
+    marker: { type: 'marker', ...marker },
+    sky: { type: 'sky', ...sky },
+    'fixed-date': { type: 'fixed-date', ...fixed },
+  };
   return {
     ...rest,
-    lead: leadType === 'marker' ? { type: 'marker', ...marker } : { type: 'fixed-date', ...fixed },
+    lead: leads[leadType],
     lastDate: draft.hasLastDate ? lastDate : null,
   };
 }
@@ -60,6 +78,7 @@ export function newDraft(marker: { markerKey: string; phenomenon: Phenomenon } |
     caution: '',
     leadType: 'marker',
     marker: marker ? { ...marker, occurrence: 1 } : NO_MARKER,
+    sky: NO_SKY,
     fixed: NO_FIXED,
     offsets: FIRST_OFFSETS,
     hasLastDate: false,

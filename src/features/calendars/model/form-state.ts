@@ -1,5 +1,6 @@
 import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { Language } from '#shared/contracts/people.js';
+import type { SkyMarkerYear } from '#shared/contracts/sky-markers.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import { monthDay } from '#shared/contracts/common.js';
@@ -20,6 +21,8 @@ export interface FormState {
   /** The sentence for a field, or undefined while all is well. */
   at: (field: string) => string | undefined;
   markers: Markers | null;
+  /** The year of the sign of the sky that leads; null while another thing leads or it is on its way. */
+  sign: SkyMarkerYear | null;
   /** Keys of the stars and figures that the calendar goes by already. */
   inUse: ReadonlySet<string>;
   villageLanguage: Language | null;
@@ -32,11 +35,14 @@ export function leadingRow({ draft, markers }: Pick<FormState, 'draft' | 'marker
 }
 
 /** The day from which the four days are counted; null while there is none. */
-export function leadDayNumber(form: Pick<FormState, 'draft' | 'markers' | 'year'>): number | null {
+export function leadDayNumber(form: Pick<FormState, 'draft' | 'sign' | 'markers' | 'year'>): number | null {
   const { draft, year } = form;
   if (draft.leadType === 'fixed-date') {
     const { month, day } = draft.fixed.date;
     return monthDay.safeParse(draft.fixed.date).success ? dayNumberOf(year, month, day) : null;
+  }
+  if (draft.leadType === 'sky') {
+    return form.sign?.occurrences[draft.sky.occurrence - 1]?.expected.dayNumber ?? null;
   }
   const row = leadingRow(form);
   if (row?.outcome !== 'rises-and-sets') return null;

@@ -1,7 +1,7 @@
-import { entryInput, type EntryInput } from '#shared/contracts/calendars.js';
+import { entryInput, entryLead, type EntryInput } from '#shared/contracts/calendars.js';
 import { forget, keep, readAllKept } from '#src/lib/device-storage.js';
 import { draftPrefix } from '#src/lib/kept-draft.js';
-import { newDraft, type EntryDraft } from './entry-draft.js';
+import { hasSign, newDraft, type EntryDraft } from './entry-draft.js';
 
 /** Unsaved writing of one entry, and over which saved state of it. Both are null for a new entry. */
 export interface EntryEdit {
@@ -51,9 +51,18 @@ function readEdit(kept: unknown): EntryEdit | null {
   if (typeof kept !== 'object' || kept === null) return null;
   const { draft, base, baseVersion, keptAt } = kept as Partial<Record<keyof EntryEdit, unknown>>;
   if (typeof keptAt !== 'string' || !(baseVersion === null || typeof baseVersion === 'number')) return null;
-  if (!sameShape(draft, newDraft())) return null;
+  if (!isDraft(draft)) return null;
   if (base !== null && !entryInput.safeParse(base).success) return null;
-  return { draft: draft as EntryDraft, base: base as EntryInput | null, baseVersion, keptAt };
+  return { draft, base: base as EntryInput | null, baseVersion, keptAt };
+}
+
+function isDraft(draft: unknown): draft is EntryDraft {
+  if (typeof draft !== 'object' || draft === null || !('sky' in draft)) return false;
+  const start = newDraft();
+  // A sign of the sky has as many shapes as there are kinds: the contract knows them.
+  if (!sameShape({ ...draft, sky: start.sky }, start)) return false;
+  if (sameShape(draft.sky, start.sky) && !hasSign(draft.sky as EntryDraft['sky'])) return true;
+  return entryLead.safeParse({ type: 'sky', ...(draft.sky as object) }).success;
 }
 
 /** The same members of the same types, all the way down. */

@@ -4,21 +4,31 @@ import type { Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.
 import { entryOffsets, fixedLastDate } from '#shared/contracts/calendars.js';
 import { monthDay } from '#shared/contracts/common.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
+import { signOf, type Signs } from './signs.js';
 
 /** The markers of a place and year by key. */
 export type Markers = ReadonlyMap<string, MarkerRow>;
 
 /**
  * The dates of an entry while it is being written, by the same rules as on the server. Null while it cannot have
- * any: no star chosen yet, days out of order, markers still on their way.
+ * any: nothing chosen yet, days out of order, markers still on their way.
  */
-export function previewDates(content: EntryInput, year: number, markers: Markers | null): EntryDates | null {
+export function previewDates(
+  content: EntryInput,
+  year: number,
+  markers: Markers | null,
+  signs: Signs = new Map(),
+): EntryDates | null {
   const { lead, offsets, hasLastDate, lastDate } = content;
   if (!entryOffsets.safeParse(offsets).success) return null;
   const timing = hasLastDate && fixedLastDate.shape.date.safeParse(lastDate?.date).success;
   const known: EntryInput = { ...content, hasLastDate: timing };
   if (lead.type === 'fixed-date') {
     return monthDay.safeParse(lead.date).success ? entryDatesFromDays(known, year, null) : null;
+  }
+  if (lead.type === 'sky') {
+    const sign = signOf(signs, lead.spec);
+    return sign && entryDatesFromDays(known, year, sign);
   }
   const row = markers?.get(lead.markerKey);
   return row ? entryDatesFromDays(known, year, { ...row, year }) : null;

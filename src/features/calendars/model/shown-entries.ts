@@ -1,7 +1,9 @@
 import type { Entry, EntryInput } from '#shared/contracts/calendars.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
 import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
 import { isNewId, type Edits, type EntryEdit } from './kept-edits.js';
 import { previewDates, withOverlaps, type Markers, type ShownEntry } from './preview-dates.js';
+import { signOf, type Signs } from './signs.js';
 
 interface Sources {
   saved: readonly Entry[];
@@ -11,10 +13,19 @@ interface Sources {
   newStart: EntryDraft;
   year: number;
   markers: Markers | null;
+  signs: Signs;
 }
 
 /** The entries as they look now: what is saved, with everything over it that is written and not saved. */
-export function shownEntries({ saved, edits, openId, newStart, year, markers }: Sources): ShownEntry[] {
+export function shownEntries({
+  saved,
+  edits,
+  openId,
+  newStart,
+  year,
+  markers,
+  signs,
+}: Sources): ShownEntry[] {
   const shown = saved.map((entry): ShownEntry => {
     const edit = edits.get(entry.id);
     if (!edit)
@@ -30,10 +41,13 @@ export function shownEntries({ saved, edits, openId, newStart, year, markers }: 
   });
   return withOverlaps([...shown, ...added]);
 
-  /** While the stars are on their way, an entry that still goes by the same thing keeps its saved sign. */
+  /** While the sky is on its way, an entry that still goes by the same thing keeps its saved sign. */
   function datesOf(content: EntryInput, entry: Entry | null) {
     if (markers === null && content.lead.type === 'marker') return entry?.dates ?? null;
-    return previewDates(content, year, markers);
+    if (content.lead.type === 'sky' && signOf(signs, content.lead.spec) === null) {
+      return entry && sameJson(entry.content.lead, content.lead) ? entry.dates : null;
+    }
+    return previewDates(content, year, markers, signs);
   }
 }
 

@@ -1,7 +1,15 @@
+import type { EntryLead } from '#shared/contracts/calendars.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { windowDayNumbers } from '#src/lib/entry-words.js';
 import type { BoardBar, BoardPairing } from '#src/ui/pictures/year-board.js';
 import type { Markers, ShownEntry } from './preview-dates.js';
+
+/** Keys of lanes: stars by their own, signs of the sky by their text. */
+export function laneKeyOf(lead: EntryLead): string | null {
+  if (lead.type === 'fixed-date') return null;
+  return lead.type === 'marker' ? lead.markerKey : canonicalJson(lead.spec);
+}
 
 /** The stars and figures that entries go by, each once, in the order in which the entries bring them. */
 export function lanesOf(entries: readonly ShownEntry[], markers: Markers | null): MarkerRow[] {
@@ -31,8 +39,9 @@ export function barsOf(entries: readonly ShownEntry[], nameOf: (entry: ShownEntr
 
 /** From the marker's expected day in its lane to the window; null for a fixed date or without one. */
 export function pairingOf(entry: ShownEntry | null): BoardPairing | null {
-  if (entry?.content.lead.type !== 'marker' || !entry.dates?.marker) return null;
-  return { laneKey: entry.content.lead.markerKey, dayNumber: entry.dates.marker.expected.dayNumber };
+  const laneKey = entry && laneKeyOf(entry.content.lead);
+  if (laneKey === null || !entry?.dates?.marker) return null;
+  return { laneKey, dayNumber: entry.dates.marker.expected.dayNumber };
 }
 
 /** Entries whose lead brings no day this year. One that goes by nothing yet is not among them. */

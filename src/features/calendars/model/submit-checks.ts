@@ -1,4 +1,5 @@
 import type { Community } from '#shared/contracts/people.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import type { ShownEntry } from './preview-dates.js';
 
 /** What keeps a draft from being submitted. */
@@ -29,7 +30,11 @@ export function submitChecks(
   if (community?.agricultureContact === '') missing.push('no-agriculture');
   const markers = new Set(
     saved.flatMap(({ saved: { content } }) =>
-      content.lead.type === 'marker' ? [content.lead.markerKey] : [],
+      content.lead.type === 'fixed-date'
+        ? []
+        : content.lead.type === 'marker'
+          ? [content.lead.markerKey]
+          : [canonicalJson(content.lead.spec)],
     ),
   );
   return {

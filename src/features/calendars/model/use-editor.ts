@@ -11,8 +11,9 @@ import {
 } from '#src/lib/calendar-queries.js';
 import { entriesQuery } from '../api/calendars-queries.js';
 import { answersByEntry, type EntryAnswers } from './elder-requests.js';
-import { newDraft } from './entry-draft.js';
+import { contentOf, newDraft } from './entry-draft.js';
 import { draftFor, isStale, orphans, shownEntries } from './shown-entries.js';
+import { specsOf, useSigns } from './signs.js';
 import { NO_EDITS, useEntryEdits } from './use-entry-edits.js';
 import { useSelection } from './use-selection.js';
 
@@ -31,6 +32,15 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
   const writing = canWrite ? edits.all : NO_EDITS;
 
   const newStart = useMemo(() => newDraft(selection.wanted), [selection.wanted]);
+  const signs = useSigns(
+    placeId,
+    year,
+    // Those being written, and those saved: the open one shows all of its days in the year.
+    useMemo(() => {
+      const written = [...writing.values()].map(({ draft }) => contentOf(draft));
+      return specsOf([...(entries.data ?? []).map(({ content }) => content), ...written]);
+    }, [writing, entries.data]),
+  );
   const saved = useMemo(() => entries.data ?? [], [entries.data]);
   const shown = useMemo(
     () =>
@@ -41,8 +51,9 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
         newStart,
         year,
         markers: markers.data?.byKey ?? null,
+        signs,
       }),
-    [saved, writing, canWrite, selection.openId, newStart, year, markers.data],
+    [saved, writing, canWrite, selection.openId, newStart, year, markers.data, signs],
   );
   const open = shown.find((entry) => entry.id === selection.openId) ?? null;
   const selected = open ?? (selection.isWide ? (shown[0] ?? null) : null);
@@ -55,6 +66,7 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
     isOfficer,
     entries,
     markers,
+    signs,
     community: community.data ?? null,
     edits,
     selection,

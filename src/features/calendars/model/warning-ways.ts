@@ -9,7 +9,14 @@ import type { ShownEntry } from './preview-dates.js';
 export type Way =
   | {
       kind:
-        'otherStar' | 'useFirst' | 'changeDays' | 'changeLastDate' | 'writeSigns' | 'fixedDate' | 'agreed';
+        | 'otherStar'
+        | 'otherSign'
+        | 'useFirst'
+        | 'changeDays'
+        | 'changeLastDate'
+        | 'writeSigns'
+        | 'fixedDate'
+        | 'agreed';
     }
   | { kind: 'otherDay'; phenomenon: Phenomenon };
 
@@ -18,15 +25,17 @@ const OTHER_DAYS_MAX = 2;
 /** @param row of the leading star; null where none is known */
 export function waysOut(warning: EntryWarning, draft: EntryDraft, row: MarkerRow | null): Way[] {
   switch (warning) {
+    case 'sign-not-here':
+      return [{ kind: 'otherSign' }, { kind: 'fixedDate' }];
     case 'no-date-this-year':
     case 'star-does-not-serve':
-      return [...otherDays(draft, row), { kind: 'otherStar' }, { kind: 'fixedDate' }];
+      return [...otherDays(draft, row), another(draft), { kind: 'fixedDate' }];
     case 'one-occurrence-only':
-      return [{ kind: 'useFirst' }, { kind: 'otherStar' }];
+      return [{ kind: 'useFirst' }, another(draft)];
     case 'weak-marker':
     case 'never-disappears':
     case 'lost-in-light-nights':
-      return [{ kind: 'writeSigns' }, { kind: 'otherStar' }];
+      return [{ kind: 'writeSigns' }, another(draft)];
     case 'window-closed-by-last-date':
     case 'window-shortened-by-last-date':
       return [{ kind: 'changeDays' }, { kind: 'changeLastDate' }];
@@ -35,6 +44,10 @@ export function waysOut(warning: EntryWarning, draft: EntryDraft, row: MarkerRow
     case 'windows-overlap':
       return [{ kind: 'changeDays' }];
   }
+}
+
+function another({ leadType }: EntryDraft): Way {
+  return { kind: leadType === 'sky' ? 'otherSign' : 'otherStar' };
 }
 
 /** Days of the same star that do come this year. */

@@ -45,7 +45,7 @@ function VenusDays({ line, dates, year }: { line: VenusLine; dates: DateWords; y
       </p>
       <p className="text-small text-umber-soft">{t(`venus.meaning.${appearance}`)}</p>
       {notes.map((note) =>
-        note === 'threshold-extrapolated' ? null : (
+        note === 'threshold-extrapolated' || note === 'standstill' ? null : (
           <p key={note} className="text-small">
             {t(`venus.note.${note}`)}
           </p>

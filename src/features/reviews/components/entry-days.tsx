@@ -2,7 +2,7 @@ import { useTranslation } from 'react-i18next';
 import type { EntryDates, EntryInput, EntryWindow } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { dateOfDayNumber, dayNumberOf, readDate } from '#src/lib/days.js';
-import { endOfNight } from '#src/lib/sky-words.js';
+import { endOfLead } from '#src/lib/sky-words.js';
 import { RingRow, type RangeMark } from '#src/ui/pictures/ring-row.js';
 
 /** Longer windows would make holes too small to count; they are drawn a week a hole elsewhere. */
@@ -54,13 +54,13 @@ export function EntryDays({
 }
 
 function rangeOf({ marker }: EntryDates, { lead }: EntryInput): RangeMark | null {
-  if (marker === null || lead.type !== 'marker') return null;
+  if (marker === null || lead.type === 'fixed-date') return null;
   return {
-    key: lead.markerKey,
+    key: 'range',
     early: marker.early?.dayNumber ?? null,
     expected: marker.expected.dayNumber,
     late: marker.late?.dayNumber ?? null,
-    side: endOfNight(lead.phenomenon),
+    side: endOfLead(lead),
   };
 }
 

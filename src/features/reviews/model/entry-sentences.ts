@@ -1,8 +1,10 @@
 import { useTranslation } from 'react-i18next';
 import type { MonthDay } from '#shared/contracts/common.js';
 import type { FrozenMarker, VersionEntryBody } from '#shared/contracts/versions.js';
+import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import { useDateWords, type DateWords } from '#src/lib/date-words.js';
 import { markerName } from '#src/lib/marker-names.js';
+import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { endOfNight } from '#src/lib/sky-words.js';
 
 export interface EntrySentences {
@@ -21,12 +23,27 @@ export function useEntrySentences(
 ): EntrySentences {
   const { t } = useTranslation(['reviews', 'sky']);
   const words = useDateWords();
+  const sign = useSkySignWords();
   const { lead, offsets } = content;
   const { window } = dates;
 
   const leadSentence = () => {
     if (lead.type === 'fixed-date') {
       return t('reviews:fixed', { day: words.day(isoIn(year, lead.date)), source: lead.source });
+    }
+    if (lead.type === 'sky') {
+      const name = sign(lead.spec, new Map(markers.map((one) => [one.markerKey, one])));
+      if (dates.marker === null) {
+        return t('reviews:noSignDate', {
+          sign: name,
+          reason: t(`sky:noSign.${dates.sky?.reason ?? 'not-in-this-year'}`),
+        });
+      }
+      return t(`reviews:sign.${skyMarkerTimeOf(lead.spec)}`, {
+        sign: name,
+        day: words.day(dates.marker.expected.gregorian),
+        between: rangeWords(dates.marker, words),
+      });
     }
     const found = markers.find(({ markerKey }) => markerKey === lead.markerKey);
     const marker = found ? markerName(found) : lead.markerKey;

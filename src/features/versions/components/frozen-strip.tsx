@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { FrozenMarker, Version } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
@@ -8,6 +9,7 @@ import { useLaneWords } from '#src/lib/lane-words.js';
 import { markerName } from '#src/lib/marker-names.js';
 import { useWideScreen } from '#src/lib/wide-screen.js';
 import { More } from '#src/ui/fold.js';
+import { useSignLanes } from '#src/lib/sign-lanes.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
 import { YearBoard } from '#src/ui/pictures/year-board.js';
@@ -18,6 +20,11 @@ export function FrozenStrip({ version }: { version: Version }) {
   const dates = useDateWords();
   const laneWords = useLaneWords();
   const isWide = useWideScreen();
+  const names = useMemo(
+    () => new Map(version.header.markers.map((marker) => [marker.markerKey, marker])),
+    [version.header.markers],
+  );
+  const signLanes = useSignLanes(version.entries, names);
   const { header, entries } = version;
   const { year } = header;
   if (!isWide || entries.length === 0) return null;
@@ -27,13 +34,16 @@ export function FrozenStrip({ version }: { version: Version }) {
       <YearBoard
         span={{ first: dayNumberOf(year, 1, 1), last: dayNumberOf(year, 12, 31) }}
         months={dates.months(year)}
-        lanes={inOrderOfEntries(version).map((marker) => ({
-          key: marker.markerKey,
-          name: markerName(marker),
-          icon: <MarkerIcon markerKey={marker.markerKey} size={20} />,
-          segments: marker.strip,
-          label: laneWords(markerName(marker), marker.strip),
-        }))}
+        lanes={[
+          ...starLanesOf(version).map((marker) => ({
+            key: marker.markerKey,
+            name: markerName(marker),
+            icon: <MarkerIcon markerKey={marker.markerKey} size={20} />,
+            segments: marker.strip,
+            label: laneWords(markerName(marker), marker.strip),
+          })),
+          ...signLanes,
+        ]}
         bars={entries.flatMap(({ entryId, content, dates: found }) =>
           found.window
             ? [
@@ -60,8 +70,13 @@ export function FrozenStrip({ version }: { version: Version }) {
   );
 }
 
-/** Lanes stand in the order in which the entries bring them, not in that of their keys. */
-function inOrderOfEntries({ header, entries }: Version): FrozenMarker[] {
+/**
+ * Stars whose first or last days lead, in the order in which the entries bring them, not in that of their keys. A star
+ * that is named by a sign of the sky only has that sign's lane.
+ */
+function starLanesOf({ header, entries }: Version): FrozenMarker[] {
   const keys = entries.flatMap(({ content: { lead } }) => (lead.type === 'marker' ? [lead.markerKey] : []));
-  return [...header.markers].sort((a, b) => keys.indexOf(a.markerKey) - keys.indexOf(b.markerKey));
+  return header.markers
+    .filter(({ markerKey }) => keys.includes(markerKey))
+    .sort((a, b) => keys.indexOf(a.markerKey) - keys.indexOf(b.markerKey));
 }

@@ -4,6 +4,7 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { markerName } from '#src/lib/marker-names.js';
+import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import type { CompareWords } from '../model/entry-sentences.js';
 
 /** Any year without a 29 February: a last date belongs to every year. */
@@ -14,15 +15,17 @@ export function useCompareWords(year: number, markers: NamesByKey): CompareWords
   const dates = useDateWords();
   const entryWords = useEntryWords();
   const markerDays = useMarkerDayWords();
+  const sign = useSkySignWords();
   return useMemo(
     () => ({
       day: (iso) => dates.day(iso),
       window: ({ content, dates: found }) => entryWords.window(content, found.window, year),
       about: markerDays.about,
       lead: (lead) => entryWords.leadAlone({ lead }, markers),
-      markerName: (markerKey) => {
-        const names = markers.get(markerKey);
-        return names ? markerName(names) : markerKey;
+      signName: (lead) => {
+        if (lead.type === 'sky') return sign(lead.spec, markers);
+        const names = markers.get(lead.markerKey);
+        return names ? markerName(names) : lead.markerKey;
       },
       lastDate: ({ date, source }) =>
         t('stale.lastDateIs', { day: dates.day({ year: PLAIN_YEAR, ...date }), source }),
@@ -30,6 +33,6 @@ export function useCompareWords(year: number, markers: NamesByKey): CompareWords
       icon: (icon) => t(`icon.${icon}`),
       level: (level) => t(`level.${level}`),
     }),
-    [t, dates, entryWords, markerDays, markers, year],
+    [t, dates, entryWords, markerDays, sign, markers, year],
   );
 }

@@ -30,7 +30,8 @@ export interface CompareWords {
   window: (body: VersionEntryBody) => string;
   about: (days: OccurrenceDays) => string;
   lead: (lead: EntryLead) => string;
-  markerName: (markerKey: string) => string;
+  /** The star or sign alone, without its phenomenon. */
+  signName: (lead: Exclude<EntryLead, { type: 'fixed-date' }>) => string;
   lastDate: (lastDate: FixedLastDate) => string;
   kind: (kind: EntryInput['kind']) => string;
   icon: (icon: EntryInput['icon']) => string;
@@ -106,9 +107,9 @@ function leadSentences(before: VersionEntryBody, after: VersionEntryBody, words:
   }
   const wasDays = before.dates.marker;
   const isDays = after.dates.marker;
-  if (is.type !== 'marker' || !wasDays || !isDays || sameJson(wasDays, isDays)) return [];
+  if (is.type === 'fixed-date' || !wasDays || !isDays || sameJson(wasDays, isDays)) return [];
   const days = isDays.expected.dayNumber - wasDays.expected.dayNumber;
-  const marker = words.markerName(is.markerKey);
+  const marker = words.signName(is);
   if (days === 0) {
     return [
       {

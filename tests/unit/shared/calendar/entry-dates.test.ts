@@ -191,3 +191,47 @@ describe('days that a screen has at hand', () => {
     expect(entryDatesFromDays(timing(), 2027, days)).toEqual(entryDatesOf(timing(), 2027, whole));
   });
 });
+
+describe('an entry that goes by another sign of the sky', () => {
+  const spec = { kind: 'noon-sun', passage: 'back', ridgeName: 'the south ridge' } as const;
+  const lead = { type: 'sky', spec, occurrence: 1 } as const;
+  const days = occurrenceDaysOf(
+    occurrence({ expected: '2027-01-06', early: '2027-01-04', late: '2027-01-07' }),
+  );
+  const sign = { spec, year: 2027, outcome: 'dated', reason: null, occurrences: [days] } as const;
+
+  it('counts from the day of the sign, and keeps nothing of its direction or clock time', () => {
+    const told = { ...sign, occurrences: [{ ...days, azimuthDeg: 180, localTime: '11:40' }] };
+    const dates = entryDatesFromDays(timing({ lead }), 2027, told);
+    expect(dates.window?.earliest).toBe('2027-01-09');
+    expect(dates.marker).toEqual(days);
+    expect(dates).toMatchObject({ starOutcome: null, phenomenonOutcome: null });
+    expect(dates.sky).toEqual({ outcome: 'dated', reason: null });
+    expect(dates.warnings).toEqual([]);
+  });
+
+  it.each([
+    ['sign-not-here', { outcome: 'never-here', reason: 'noon-sun-always-clears' }],
+    ['no-date-this-year', { outcome: 'none-in-this-year', reason: 'not-in-this-year' }],
+  ] as const)('has no window and warns %s where the sign has no day', (warning, sky) => {
+    const dates = entryDatesFromDays(timing({ lead }), 2027, { ...sign, ...sky, occurrences: [] });
+    expect(dates).toMatchObject({ window: null, marker: null, warnings: [warning], sky });
+  });
+
+  it('says so where the year has the sign only once', () => {
+    const second = timing({ lead: { ...lead, occurrence: 2 } });
+    expect(entryDatesFromDays(second, 2027, sign).warnings).toEqual(['one-occurrence-only']);
+  });
+
+  it('refuses the days of another sign or year: a date must never be lent', () => {
+    const other = { ...sign, spec: { ...spec, passage: 'gone' } } as const;
+    expect(() => entryDatesFromDays(timing({ lead }), 2027, other)).toThrow(RangeError);
+    expect(() => entryDatesFromDays(timing({ lead }), 2028, sign)).toThrow(RangeError);
+    expect(() => entryDatesFromDays(timing({ lead }), 2027, null)).toThrow(RangeError);
+  });
+
+  it('leaves the text of entries that go by a star as it was before there were such signs', () => {
+    const dates = entryDatesOf(timing(), 2027, markerYear({ occurrences: [june] }));
+    expect(Object.keys(dates)).not.toContain('sky');
+  });
+});

@@ -3,6 +3,8 @@ import { ENTRY_WARNINGS, type EntryDates, type EntryTiming } from '#shared/calen
 import { VERSION_STATES } from '#shared/calendar/version-state.js';
 import { ENTRY_GAPS, PEOPLE_GAPS, type AnswerFact, type SignatureFact } from '#shared/calendar/sign-off.js';
 import * as calendars from '#shared/contracts/calendars.js';
+import type { SkyMarkerSpec } from '#shared/contracts/sky-markers.js';
+import type * as sky from '#shared/sky/index.js';
 import type { Answer } from '#shared/contracts/reviews.js';
 import * as versions from '#shared/contracts/versions.js';
 
@@ -17,6 +19,7 @@ describe('rules and contracts', () => {
   it('describe an entry and its dates alike', () => {
     expectTypeOf<calendars.EntryInput>().toExtend<EntryTiming>();
     expectTypeOf<EntryDates>().toEqualTypeOf<calendars.EntryDates>();
+    expectTypeOf<SkyMarkerSpec>().toEqualTypeOf<sky.SkyMarkerSpec>();
     expectTypeOf<Answer>().toExtend<AnswerFact>();
     expectTypeOf<versions.Signature>().toExtend<SignatureFact>();
   });

@@ -14,7 +14,7 @@ const edit = (changes = {}, baseVersion: number | null = 1): EntryEdit => ({
   keptAt: '2027-06-07T06:00:00Z',
 });
 const show = (edits: Map<string, EntryEdit>, openId: string | null = null) =>
-  shownEntries({ saved: [saved], edits, openId, newStart: start, year: YEAR, markers });
+  shownEntries({ saved: [saved], edits, openId, newStart: start, year: YEAR, markers, signs: new Map() });
 
 describe('the entries as they look now', () => {
   it('show what is written and not saved, with the dates it brings', () => {

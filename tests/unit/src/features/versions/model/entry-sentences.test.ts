@@ -16,7 +16,7 @@ const words: CompareWords = {
   window: ({ dates }) => `window ${dates.window?.bestFrom.slice(5) ?? 'none'}`,
   about: ({ expected }) => `about ${expected.gregorian.slice(5)}`,
   lead: (lead) => (lead.type === 'marker' ? lead.markerKey : 'fixed date'),
-  markerName: (key) => `<${key}>`,
+  signName: (lead) => `<${lead.type === 'sky' ? lead.spec.kind : lead.markerKey}>`,
   lastDate: ({ date, source }) => `${date.day}/${date.month} ${source}`,
   kind: (kind) => kind,
   icon: (icon) => icon,

@@ -1,0 +1,53 @@
+import {
+  DARK_NIGHT_ENDS,
+  FIGURES,
+  markerKeyOf,
+  NIGHT_DEPTHS_DEG,
+  NOON_SUN_PASSAGES,
+  type SkyMarkerSpec,
+  STARS,
+  SUN_SEASONS,
+  type TwilightDepthDeg,
+} from '#shared/sky/index.js';
+import type { WatchedPlace } from '../places/watched-place.service.js';
+
+/** Stars that everybody knows. */
+const BRIGHTER_THAN_V = 1.3;
+/** Nine in the evening by the Sun: dark in most of the year, and people are still up. */
+const EVENING_HOUR = 21;
+const DUSK_DEPTH_DEG: TwilightDepthDeg = 12;
+
+const KNOWN_KEYS: readonly string[] = [
+  ...FIGURES.map(({ key }) => key),
+  ...STARS.filter(({ vMag }) => vMag < BRIGHTER_THAN_V)
+    .sort((a, b) => a.vMag - b.vMag)
+    .map(({ hr }) => markerKeyOf(hr)),
+];
+
+/**
+ * What an officer may be offered at a place, the Sun first. Every kind stands among it with parameters that people use;
+ * what the place never has falls away when its year is computed. Points of the skyline have names that only the village
+ * knows, so sunrise over a point is asked for and not offered.
+ */
+export function offeredSpecs({ latitudeDeg }: WatchedPlace): SkyMarkerSpec[] {
+  return [
+    ...SUN_SEASONS.map((season) => ({ kind: 'sun-season' as const, season })),
+    { kind: 'zenith-sun' },
+    ...NOON_SUN_PASSAGES.map((passage) => ({ kind: 'noon-sun' as const, passage, ridgeName: '' })),
+    ...NIGHT_DEPTHS_DEG.flatMap((depthDeg) =>
+      DARK_NIGHT_ENDS.map((end) => ({ kind: 'dark-night' as const, end, depthDeg })),
+    ),
+    ...KNOWN_KEYS.map((markerKey) => ({
+      kind: 'due-meridian' as const,
+      markerKey,
+      facing: latitudeDeg >= 0 ? ('south' as const) : ('north' as const),
+      solarHour: EVENING_HOUR,
+    })),
+    ...KNOWN_KEYS.map((markerKey) => ({
+      kind: 'culmination' as const,
+      markerKey,
+      twilight: 'dusk' as const,
+      depthDeg: DUSK_DEPTH_DEG,
+    })),
+  ];
+}
