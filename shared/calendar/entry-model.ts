@@ -20,7 +20,8 @@ export interface MonthDay {
 
 export type EntryLead =
   | { type: 'marker'; markerKey: string; phenomenon: Phenomenon; occurrence: 1 | 2 }
-  | { type: 'sky'; spec: SkyMarkerSpec; occurrence: 1 | 2 }
+  /** `occurrence` counts within the year: up to thirteen for Moons, two for the rest. */
+  | { type: 'sky'; spec: SkyMarkerSpec; occurrence: number }
   | { type: 'fixed-date'; date: MonthDay; source: string };
 
 /** Days from the lead day, in order. */

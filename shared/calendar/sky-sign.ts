@@ -40,6 +40,16 @@ export function skySign(spec: SkyMarkerSpec, starName: string, { t, compassPoint
         : t(`sign.noon-sun.${spec.passage}.named`, { ridge: spec.ridgeName });
     case 'zenith-sun':
       return t('sign.zenith-sun');
+    case 'moon-phase':
+      return t(`sign.moon-phase.${spec.event}`);
+    case 'moon-counted':
+      return t(`sign.moon-counted.${spec.event}`, {
+        star,
+        number: spec.count,
+        phenomenon: t(`phenomenon.${spec.phenomenon}`),
+      });
+    case 'venus-appearance':
+      return t(`sign.venus-appearance.${spec.appearance}`);
     case 'dark-night':
       return t(`sign.dark-night.${spec.end}.${spec.depthDeg}`);
   }

@@ -5,6 +5,7 @@ import { ROLES } from './people.js';
 import { skyMarkerSpec } from './sky-markers.js';
 import { markerKey, occurrenceDays, phenomenon } from './stars.js';
 import {
+  MOON_COUNT,
   PHENOMENON_OUTCOMES,
   SKY_MARKER_OUTCOMES,
   SKY_MARKER_REASONS,
@@ -65,11 +66,17 @@ export type SharingLevel = (typeof SHARING_LEVELS)[number];
 
 /** Which of the year's occurrences, where there are two. */
 const occurrence = z.union([z.literal(1), z.literal(2)]);
+/** A year has up to thirteen Moons of a kind. */
+const signOccurrence = z
+  .number('not-a-number')
+  .int('moon-count')
+  .min(1, 'moon-count')
+  .max(MOON_COUNT.max, 'moon-count');
 
 export const entryLead = z.discriminatedUnion('type', [
   z.strictObject({ type: z.literal('marker'), markerKey, phenomenon, occurrence }),
   /** A marker beyond a star's first and last days: Sun, nights, culminations. */
-  z.strictObject({ type: z.literal('sky'), spec: skyMarkerSpec, occurrence }),
+  z.strictObject({ type: z.literal('sky'), spec: skyMarkerSpec, occurrence: signOccurrence }),
   z.strictObject({ type: z.literal('fixed-date'), date: monthDay, source: line(200, 1) }),
 ]);
 export type EntryLead = z.infer<typeof entryLead>;

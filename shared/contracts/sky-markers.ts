@@ -4,6 +4,8 @@ import {
   DARK_NIGHT_ENDS,
   FACINGS,
   NIGHT_DEPTHS_DEG,
+  MOON_COUNT,
+  MOON_EVENTS,
   NOON_SUN_PASSAGES,
   POINT_NAME_MAX,
   POLE_POSITIONS,
@@ -17,11 +19,12 @@ import {
   SUN_SEASONS,
   TWILIGHT_DEPTHS_DEG,
   TWILIGHTS,
+  VENUS_APPEARANCES,
 } from '../sky/vocabulary.js';
 import { id, line, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
-import { engineYear, markerKey, occurrenceDays } from './stars.js';
+import { engineYear, markerKey, occurrenceDays, phenomenon } from './stars.js';
 
 const solarHour = z
   .number('not-a-number')
@@ -89,6 +92,19 @@ export const skyMarkerSpec = z.discriminatedUnion('kind', [
     end: z.enum(DARK_NIGHT_ENDS),
     depthDeg: z.literal(NIGHT_DEPTHS_DEG),
   }),
+  z.strictObject({ kind: z.literal('moon-phase'), event: z.enum(MOON_EVENTS) }),
+  z.strictObject({
+    kind: z.literal('moon-counted'),
+    markerKey,
+    phenomenon,
+    event: z.enum(MOON_EVENTS),
+    count: z
+      .number('not-a-number')
+      .int('moon-count')
+      .min(MOON_COUNT.min, 'moon-count')
+      .max(MOON_COUNT.max, 'moon-count'),
+  }),
+  z.strictObject({ kind: z.literal('venus-appearance'), appearance: z.enum(VENUS_APPEARANCES) }),
 ]);
 export type SkyMarkerSpec = z.infer<typeof skyMarkerSpec>;
 

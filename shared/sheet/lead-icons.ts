@@ -10,8 +10,9 @@ export function markerIconKey(markerKey: string): IconKey {
   return isStar ? 'star' : (FIGURE_ICONS[markerKey] ?? 'cluster');
 }
 
-/** The drawn sign of what a sign of the sky is about: the star that it goes by, the Sun, the stars of a dark night. */
+/** The drawn sign of what a sign of the sky is about: the star that it goes by, the Sun, the Moon, the stars of a dark night. */
 export function skySignIconKey(spec: Extract<EntryLead, { type: 'sky' }>['spec']): IconKey {
+  if (spec.kind === 'moon-phase' || spec.kind === 'moon-counted') return 'moon';
   if ('markerKey' in spec) return markerIconKey(spec.markerKey);
-  return spec.kind === 'dark-night' ? 'star' : 'sun';
+  return spec.kind === 'dark-night' || spec.kind === 'venus-appearance' ? 'star' : 'sun';
 }

@@ -51,9 +51,11 @@ export function useEntryWords(): EntryWords {
         return t(`${group}.fixed`, { day, source: lead.source });
       }
       if (lead.type === 'sky') {
-        return t(`${group}.${lead.occurrence === 2 ? 'skySecond' : 'sky'}`, {
-          sign: sign(lead.spec, markers),
-        });
+        const name = sign(lead.spec, markers);
+        // Moons are numbered from the first of the year on; of the rest only the second needs a word.
+        if (lead.spec.kind === 'moon-phase')
+          return t(`${group}.skyNth`, { sign: name, nth: lead.occurrence });
+        return t(`${group}.${lead.occurrence === 2 ? 'skySecond' : 'sky'}`, { sign: name });
       }
       if (lead.markerKey === '') return t(`${group}.none`);
       const names = markers.get(lead.markerKey);

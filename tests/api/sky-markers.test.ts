@@ -151,6 +151,41 @@ describe('an entry that goes by such a sign', () => {
     expect(JSON.stringify(sheet.body)).toContain('Belt of Orion due south');
   });
 
+  it('may be the seventh first crescent of a year, with its range, and a Moon that the year has not is told', async () => {
+    const calendar = await beginCalendar({ ...village, placeId: place.id }, 2031);
+    const crescents = (
+      await observer
+        .post(pathOf(place), { year: 2031, spec: { kind: 'moon-phase', event: 'first-crescent' } })
+        .expect(200)
+    ).body as SkyMarkerYear;
+    expect(crescents.time).toBe('evening');
+    expect(crescents.occurrences.length).toBeGreaterThanOrEqual(12);
+    const spec = { kind: 'moon-phase', event: 'first-crescent' } as const;
+    const seventh = await addEntry(village.officer, calendar.id, {
+      lead: { type: 'sky', spec, occurrence: 7 },
+    });
+    expect(seventh.dates.marker?.expected).toEqual(crescents.occurrences[6]?.expected);
+    expect(seventh.dates.marker?.late?.dayNumber).toBeGreaterThan(
+      seventh.dates.marker?.expected.dayNumber ?? 0,
+    );
+    const full = { kind: 'moon-phase', event: 'full' } as const;
+    const fulls = (await observer.post(pathOf(place), { year: 2031, spec: full }).expect(200))
+      .body as SkyMarkerYear;
+    const last = await addEntry(village.officer, calendar.id, {
+      lead: { type: 'sky', spec: full, occurrence: 13 },
+    });
+    expect(last.dates.warnings).toEqual(fulls.occurrences.length === 13 ? [] : ['one-occurrence-only']);
+    const refused = await village.officer
+      .post(`/api/calendars/${calendar.id}/entries`, {
+        ...entryInput(),
+        lead: { type: 'sky', spec, occurrence: 14 },
+      })
+      .expect(422);
+    expect((refused.body as Problem).errors).toMatchObject([
+      { field: 'lead.occurrence', code: 'moon-count' },
+    ]);
+  });
+
   it('names its star in the frozen version, so that the name is there when the table changes', async () => {
     const calendar = await beginCalendar({ ...village, placeId: north.id }, 2028);
     const spec = { kind: 'about-pole', markerKey: 'hr5191', position: 'lowest', solarHour: 21 } as const;

@@ -9,7 +9,8 @@ export function whyNoDate(
 ): string | null {
   const { starOutcome, phenomenonOutcome, sky, warnings } = dates;
   if (starOutcome !== null && starOutcome !== 'rises-and-sets') return t(`sheet.noDate.${starOutcome}`);
-  if (warnings.includes('one-occurrence-only')) return t('sheet.noDate.one-occurrence-only', { year });
+  if (warnings.includes('one-occurrence-only'))
+    return t(`sheet.noDate.${sky ? 'fewer-of-them' : 'one-occurrence-only'}`, { year });
   if (sky && sky.reason !== null) return skyText(`noSign.${sky.reason}`);
   if (phenomenonOutcome !== null && phenomenonOutcome !== 'dated') {
     return t(`sheet.noDate.${phenomenonOutcome}`, { year });

@@ -4,10 +4,12 @@ import {
   markerKeyOf,
   NIGHT_DEPTHS_DEG,
   NOON_SUN_PASSAGES,
+  MOON_EVENTS,
   type SkyMarkerSpec,
   STARS,
   SUN_SEASONS,
   type TwilightDepthDeg,
+  VENUS_APPEARANCES,
 } from '#shared/sky/index.js';
 import type { WatchedPlace } from '../places/watched-place.service.js';
 
@@ -16,6 +18,8 @@ const BRIGHTER_THAN_V = 1.3;
 /** Nine in the evening by the Sun: dark in most of the year, and people are still up. */
 const EVENING_HOUR = 21;
 const DUSK_DEPTH_DEG: TwilightDepthDeg = 12;
+/** The sign from which most peoples count their Moons. */
+const COUNTED_FROM = 'pleiades';
 
 const KNOWN_KEYS: readonly string[] = [
   ...FIGURES.map(({ key }) => key),
@@ -32,11 +36,20 @@ const KNOWN_KEYS: readonly string[] = [
 export function offeredSpecs({ latitudeDeg }: WatchedPlace): SkyMarkerSpec[] {
   return [
     ...SUN_SEASONS.map((season) => ({ kind: 'sun-season' as const, season })),
-    { kind: 'zenith-sun' },
+    { kind: 'zenith-sun' as const },
     ...NOON_SUN_PASSAGES.map((passage) => ({ kind: 'noon-sun' as const, passage, ridgeName: '' })),
     ...NIGHT_DEPTHS_DEG.flatMap((depthDeg) =>
       DARK_NIGHT_ENDS.map((end) => ({ kind: 'dark-night' as const, end, depthDeg })),
     ),
+    ...MOON_EVENTS.map((event) => ({ kind: 'moon-phase' as const, event })),
+    ...MOON_EVENTS.map((event) => ({
+      kind: 'moon-counted' as const,
+      markerKey: COUNTED_FROM,
+      phenomenon: 'heliacal-rising' as const,
+      event,
+      count: 1,
+    })),
+    ...VENUS_APPEARANCES.map((appearance) => ({ kind: 'venus-appearance' as const, appearance })),
     ...KNOWN_KEYS.map((markerKey) => ({
       kind: 'due-meridian' as const,
       markerKey,

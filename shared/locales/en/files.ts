@@ -139,6 +139,7 @@ export const texts = {
       'never-dark-enough': 'the nights are too light for it.',
       'none-in-this-year': 'its star has no such day in {{year}}.',
       'one-occurrence-only': 'its star has this day only once in {{year}}.',
+      'fewer-of-them': '{{year}} has fewer of them.',
       closed: 'the last advised date, {{date}} ({{source}}), comes before its best days.',
     },
   },

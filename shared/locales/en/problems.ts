@@ -94,6 +94,7 @@ export const texts = {
     'not-before-year': 'Give a year before the one that is asked for.',
     'span-too-long': 'Wanted days span at most three months.',
     'too-many': 'These are too many at a time.',
+    'moon-count': 'Give a whole number from 1 to 13.',
     'moon-month': 'Give a month from 1 to 12.',
     'marker-key': 'This is no marker. Choose one from the list of stars.',
     'sky-hour': 'An hour by the Sun lies between 0 and 23:45, in quarters of an hour.',

@@ -83,6 +83,22 @@ export const texts = {
       back: { named: 'Noon Sun back over {{ridge}}', plain: 'Noon Sun back over the skyline' },
       gone: { named: 'Noon Sun last seen over {{ridge}}', plain: 'Noon Sun last seen over the skyline' },
     },
+    'moon-phase': {
+      new: 'New Moon',
+      'first-crescent': 'First crescent of the Moon',
+      full: 'Full Moon',
+    },
+    'moon-counted': {
+      new: 'New Moon number {{number}} from {{star}}, {{phenomenon}}',
+      'first-crescent': 'First crescent number {{number}} from {{star}}, {{phenomenon}}',
+      full: 'Full Moon number {{number}} from {{star}}, {{phenomenon}}',
+    },
+    'venus-appearance': {
+      'morning-first': 'Venus, first morning seen',
+      'morning-last': 'Venus, last morning seen',
+      'evening-first': 'Venus, first evening seen',
+      'evening-last': 'Venus, last evening seen',
+    },
     'zenith-sun': 'Sun overhead at noon, no shadow',
     'dark-night': {
       last: {
@@ -110,6 +126,8 @@ export const texts = {
     'sun-never-overhead': 'The Sun never stands overhead here.',
     'nights-always-dark': 'The nights are never lighter than that here.',
     'nights-never-dark': 'The nights never get so dark here.',
+    'crescent-not-seen': 'The young Moon is never seen here in this year: too low, or behind the skyline.',
+    'star-gives-no-sign': 'The star has no such day here, so no Moon can be counted from it.',
   },
   /** What a date of such a sign belongs to; stands before the date. */
   signTimeTitle: {

@@ -14,6 +14,9 @@ export interface MoonSign {
 export interface CountedMoon {
   sign: MoonSign;
   moon: MoonDay;
+  /** The Moon's own range, widened to the neighbouring Moon where the count may lead there. */
+  early: CivilDay;
+  late: CivilDay;
   /** The sign's range crosses such a Moon: seen earlier or later, the count may lead to the neighbouring one. */
   countMayShift: boolean;
 }
@@ -47,11 +50,13 @@ export function countedMoons(
   for (const sign of signs) {
     const moon = nthFrom(moons, sign.expected.dayNumber, count);
     if (!moon) continue;
-    const ends = [sign.early, sign.late].map((end) =>
-      end === null ? moon : nthFrom(moons, end.dayNumber, count),
+    const [ifEarly, ifLate] = [sign.early, sign.late].map((end) =>
+      end === null ? moon : (nthFrom(moons, end.dayNumber, count) ?? moon),
     );
-    const countMayShift = ends.some((end) => end?.expected.dayNumber !== moon.expected.dayNumber);
-    found.push({ sign, moon, countMayShift });
+    const early = ifEarly ?? moon;
+    const late = ifLate ?? moon;
+    const countMayShift = early.expected.dayNumber !== late.expected.dayNumber;
+    found.push({ sign, moon, early: early.early, late: late.late, countMayShift });
   }
   return found;
 }

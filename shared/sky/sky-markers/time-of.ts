@@ -19,6 +19,13 @@ export function skyMarkerTimeOf(spec: SkyMarkerSpec): SkyMarkerTime {
       return 'noon';
     case 'dark-night':
       return 'night';
+    case 'moon-phase':
+    case 'moon-counted':
+      return spec.event === 'first-crescent' ? 'evening' : 'day';
+    case 'venus-appearance':
+      return spec.appearance === 'morning-first' || spec.appearance === 'morning-last'
+        ? 'morning'
+        : 'evening';
     case 'sun-season':
       return 'day';
   }

@@ -1,5 +1,6 @@
 import type { CivilDay, MarkerKey } from '../types.js';
-import type { SkyNote } from '../vocabulary.js';
+import type { MoonEvent, VenusAppearance } from '../moon/words.js';
+import type { Phenomenon, SkyNote } from '../vocabulary.js';
 import type {
   DarkNightEnd,
   Facing,
@@ -89,6 +90,28 @@ export interface DarkNightSpec {
   depthDeg: NightDepthDeg;
 }
 
+/** Every new Moon, first crescent or full Moon of the year; the entry says which. */
+export interface MoonPhaseSpec {
+  kind: 'moon-phase';
+  event: MoonEvent;
+}
+
+/** The n-th new Moon, first crescent or full Moon on or after a day of a star or figure. */
+export interface MoonCountedSpec {
+  kind: 'moon-counted';
+  markerKey: MarkerKey;
+  phenomenon: Phenomenon;
+  event: MoonEvent;
+  /** 1…13. */
+  count: number;
+}
+
+/** Venus comes or goes, as morning star or as evening star. */
+export interface VenusAppearanceSpec {
+  kind: 'venus-appearance';
+  appearance: VenusAppearance;
+}
+
 export type SkyMarkerSpec =
   | CulminationSpec
   | StarAltitudeSpec
@@ -98,7 +121,10 @@ export type SkyMarkerSpec =
   | SunAzimuthSpec
   | NoonSunSpec
   | ZenithSunSpec
-  | DarkNightSpec;
+  | DarkNightSpec
+  | MoonPhaseSpec
+  | MoonCountedSpec
+  | VenusAppearanceSpec;
 
 export type SpecOf<K extends SkyMarkerKind> = Extract<SkyMarkerSpec, { kind: K }>;
 

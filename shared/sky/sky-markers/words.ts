@@ -10,6 +10,9 @@ export const SKY_MARKER_KINDS = [
   'noon-sun',
   'zenith-sun',
   'dark-night',
+  'moon-phase',
+  'moon-counted',
+  'venus-appearance',
 ] as const;
 export type SkyMarkerKind = (typeof SKY_MARKER_KINDS)[number];
 
@@ -30,6 +33,8 @@ export const SKY_MARKER_REASONS = [
   'sun-never-overhead',
   'nights-always-dark',
   'nights-never-dark',
+  'crescent-not-seen',
+  'star-gives-no-sign',
 ] as const;
 export type SkyMarkerReason = (typeof SKY_MARKER_REASONS)[number];
 
@@ -81,6 +86,9 @@ export type NoonSunPassage = (typeof NOON_SUN_PASSAGES)[number];
 /** Clocks that people can keep: minutes from sunset or sunrise, or the hour by local mean sun. */
 export const SKY_CLOCKS = ['after-sunset', 'before-sunrise', 'solar-hour'] as const;
 export type SkyClock = (typeof SKY_CLOCKS)[number];
+
+/** A year has so many Moons of a kind at most; so far may be counted from a star's day. */
+export const MOON_COUNT = { min: 1, max: 13 } as const;
 
 /** Limits of a marker's parameters. */
 export const STAR_ALTITUDE_DEG = { min: 5, max: 85 } as const;

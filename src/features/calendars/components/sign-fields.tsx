@@ -5,7 +5,7 @@ import { skySignIconKey } from '#shared/sheet/lead-icons.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { Button } from '#src/ui/button.js';
-import { FieldNotes } from '#src/ui/field.js';
+import { FieldNotes, SelectField } from '#src/ui/field.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { hasSign } from '../model/entry-draft.js';
@@ -44,7 +44,25 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
         </div>
         <FieldNotes inputId={labelId} problem={problem} />
       </div>
-      {occurrences.length === 2 && (
+      {sky.spec.kind === 'moon-phase' && (
+        <SelectField
+          label={t('form.occurrences', { year })}
+          value={String(sky.occurrence)}
+          onChange={({ currentTarget: { value } }) => {
+            change({ sky: { ...sky, occurrence: Number(value) } });
+          }}
+        >
+          {occurrences.map((one, index) => (
+            <option key={one.expected.dayNumber} value={String(index + 1)}>
+              {t('form.nth', { nth: index + 1, date: days.about(one) })}
+            </option>
+          ))}
+          {sky.occurrence > occurrences.length && (
+            <option value={String(sky.occurrence)}>{t('form.nthNone', { nth: sky.occurrence, year })}</option>
+          )}
+        </SelectField>
+      )}
+      {sky.spec.kind !== 'moon-phase' && occurrences.length === 2 && (
         <PickGroup
           label={t('form.occurrence', { year })}
           stacked

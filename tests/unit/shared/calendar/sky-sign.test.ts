@@ -37,6 +37,12 @@ function* everySpec(): Generator<SkyMarkerSpec> {
     yield { kind: 'noon-sun', passage, ridgeName: '' };
     yield { kind: 'noon-sun', passage, ridgeName: 'the south ridge' };
   }
+  for (const event of words.MOON_EVENTS) {
+    yield { kind: 'moon-phase', event };
+    for (const phenomenon of words.PHENOMENA)
+      yield { kind: 'moon-counted', markerKey, phenomenon, event, count: 3 };
+  }
+  for (const appearance of words.VENUS_APPEARANCES) yield { kind: 'venus-appearance', appearance };
   yield { kind: 'zenith-sun' };
   for (const end of words.DARK_NIGHT_ENDS) {
     for (const depthDeg of words.NIGHT_DEPTHS_DEG) yield { kind: 'dark-night', end, depthDeg };
@@ -59,6 +65,17 @@ describe('the name of a sign of the sky', () => {
     expect(say({ kind: 'sun-azimuth', event: 'sunset', azimuthDeg: 247.5, pointName: '' })).toBe(
       'Sunset in the west-south-west, at 247.5°',
     );
+  });
+
+  it('says from which day of which star a Moon is counted', () => {
+    const spec = {
+      kind: 'moon-counted',
+      markerKey: 'pleiades',
+      phenomenon: 'heliacal-rising',
+      event: 'full',
+      count: 2,
+    } as const;
+    expect(say(spec, 'Pleiades')).toBe('Full Moon number 2 from Pleiades, first morning seen');
   });
 
   it('says hours as a clock does', () => {

@@ -11,10 +11,12 @@ describe('the drawn sign of a lead', () => {
     ]);
   });
 
-  it('is the star’s where a sign goes by a star, else the Sun’s or that of a starry night', () => {
+  it('is the star’s where a sign goes by a star, else the Sun’s, the Moon’s or that of a starry night', () => {
     const belt = { kind: 'due-meridian', markerKey: 'orion-belt', facing: 'south', solarHour: 21 } as const;
     expect(skySignIconKey(belt)).toBe('row');
     expect(skySignIconKey({ kind: 'zenith-sun' })).toBe('sun');
+    expect(skySignIconKey({ kind: 'moon-phase', event: 'full' })).toBe('moon');
+    expect(skySignIconKey({ kind: 'venus-appearance', appearance: 'morning-first' })).toBe('star');
     expect(skySignIconKey({ kind: 'dark-night', end: 'first', depthDeg: 6 })).toBe('star');
   });
 });

@@ -144,6 +144,13 @@ describe('what may be printed', () => {
 });
 
 describe('markers on the sheet', () => {
+  it('say of a Moon that the year has fewer of them', () => {
+    const lead = { type: 'sky', spec: { kind: 'moon-phase', event: 'full' }, occurrence: 13 } as const;
+    const sky = { outcome: 'dated', reason: null } as const;
+    const sheet = model([body({ lead }, { sky, marker: null, warnings: ['one-occurrence-only'] })]);
+    expect(sheet.markers[0]).toMatchObject({ icon: 'moon', whyNoDate: '2027 has fewer of them.' });
+  });
+
   it('stand once each, lettered by date, those without a date last', () => {
     const sheet = model([
       body(

@@ -46,6 +46,9 @@ const ONE_OF_EACH: readonly SkyMarkerSpec[] = [
   { kind: 'noon-sun', passage: 'back', ridgeName: '' },
   { kind: 'zenith-sun' },
   { kind: 'dark-night', end: 'last', depthDeg: 6 },
+  { kind: 'moon-phase', event: 'full' },
+  { kind: 'moon-counted', markerKey: 'hr2491', phenomenon: 'heliacal-setting', event: 'new', count: 2 },
+  { kind: 'venus-appearance', appearance: 'evening-first' },
 ];
 
 describe('every kind of sign', () => {
