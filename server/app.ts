@@ -28,6 +28,7 @@ import { reviewsRoutes } from './features/reviews/reviews.routes.js';
 import { SigningService } from './features/reviews/signing.service.js';
 import { placesRoutes } from './features/places/places.routes.js';
 import { PlacesService } from './features/places/places.service.js';
+import { DevicesService } from './features/session/devices.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
@@ -114,7 +115,7 @@ export function createApp(options: AppOptions): App {
 
   const mount = new Mount(router, dataSource);
   healthRoutes(mount, new HealthService(dataSource), productVersion);
-  sessionRoutes(router, mount, sessionService, passport);
+  sessionRoutes(router, mount, sessionService, new DevicesService(dataSource, clock), passport, clock);
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
 
   const places = new PlacesService(dataSource, clock);

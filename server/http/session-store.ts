@@ -17,7 +17,7 @@ export class SessionStore extends Store {
 
   override get(sid: string, done: (error: unknown, session?: SessionData | null) => void): void {
     this.rows
-      .findOne({ where: { sidHash: hashOf(sid) } })
+      .findOne({ where: { sidHash: sessionHash(sid) } })
       .then((row) => {
         const alive = row !== null && row.expiresAt > this.clock.now();
         done(null, alive ? (JSON.parse(row.data) as SessionData) : null);
@@ -30,7 +30,7 @@ export class SessionStore extends Store {
   override set(sid: string, session: SessionData, done: Done = ignore): void {
     const lifetimeMs = session.cookie.originalMaxAge ?? 0;
     const row = {
-      sidHash: hashOf(sid),
+      sidHash: sessionHash(sid),
       personId: personIdOf(session),
       data: JSON.stringify(session),
       expiresAt: new Date(this.clock.now().getTime() + lifetimeMs),
@@ -39,11 +39,13 @@ export class SessionStore extends Store {
   }
 
   override destroy(sid: string, done: Done = ignore): void {
-    settle(this.rows.delete({ sidHash: hashOf(sid) }), done);
+    settle(this.rows.delete({ sidHash: sessionHash(sid) }), done);
   }
 
+  /** Only a row that is still there: a request on its way must not bring an ended session back. */
   override touch(sid: string, session: SessionData, done: Done = ignore): void {
-    this.set(sid, session, done);
+    const expiresAt = new Date(this.clock.now().getTime() + (session.cookie.originalMaxAge ?? 0));
+    settle(this.rows.update({ sidHash: sessionHash(sid) }, { expiresAt }), done);
   }
 
   private get rows() {
@@ -52,7 +54,7 @@ export class SessionStore extends Store {
 }
 
 /** What the browser holds opens a session; what the table holds does not. */
-function hashOf(sid: string): string {
+export function sessionHash(sid: string): string {
   return createHash('sha256').update(sid).digest('hex');
 }
 

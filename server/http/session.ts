@@ -1,7 +1,15 @@
 import session from 'express-session';
 import type { RequestHandler } from 'express';
+import type { SessionDevice } from '../db/entities/session.entity.js';
 import type { AppContext } from './context.js';
 import { SessionStore } from './session-store.js';
+
+declare module 'express-session' {
+  interface SessionData {
+    /** Said once, at the sign-in: when it was and what the browser called itself. */
+    device?: SessionDevice;
+  }
+}
 
 const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
 export const SESSION_COOKIE = 'dawnpeg.session';

@@ -9,6 +9,7 @@ export const AUDIT_ACTIONS = [
   'code-renewed',
   'membership-ended',
   'password-set',
+  'devices-signed-out',
   'community-founded',
   'settings-changed',
   'place-added',

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { id, line } from './common.js';
+import { id, instant, line, listOf } from './common.js';
 import { anybody, defineEndpoint, signedIn } from './endpoint.js';
 import { membership, oneTimeCode, PASSWORD_MAX, PASSWORD_MIN, email } from './people.js';
 
@@ -40,6 +40,20 @@ export const firstStewardInput = z.strictObject({
   communityName: line(120, 1),
 });
 export type FirstStewardInput = z.infer<typeof firstStewardInput>;
+
+/** One browser in which the person is signed in. */
+export const device = z.strictObject({
+  id: z.string().regex(/^[0-9a-f]{64}$/u),
+  /** Null for a sign-in from before this was written down. */
+  beganAt: instant.nullable(),
+  lastUsedAt: instant,
+  /** What the browser calls itself, roughly, e.g. `Firefox` and `Android`; null where it does not say. */
+  browser: z.string().nullable(),
+  system: z.string().nullable(),
+  /** True for the one that asks. */
+  here: z.boolean(),
+});
+export type Device = z.infer<typeof device>;
 
 export const sessionEndpoints = {
   read: defineEndpoint({
@@ -93,5 +107,28 @@ export const sessionEndpoints = {
     access: anybody,
     body: firstStewardInput,
     response: sessionState,
+  }),
+  listDevices: defineEndpoint({
+    id: 'listDevices',
+    method: 'GET',
+    path: '/api/session/devices',
+    summary: 'Where the person is signed in, last used first',
+    access: signedIn,
+    response: listOf(device),
+  }),
+  endDevice: defineEndpoint({
+    id: 'endDevice',
+    method: 'DELETE',
+    path: '/api/session/devices/:deviceId',
+    summary: 'Sign out on one of the own devices; one that is signed out already stays so',
+    access: signedIn,
+    params: z.strictObject({ deviceId: device.shape.id }),
+  }),
+  endOtherDevices: defineEndpoint({
+    id: 'endOtherDevices',
+    method: 'DELETE',
+    path: '/api/session/devices',
+    summary: 'Sign out everywhere but here',
+    access: signedIn,
   }),
 } as const;

@@ -133,6 +133,7 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     entryId: village.entryId,
     personId: village.personId,
     markerKey: 'pleiades',
+    deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
   };
 }

@@ -1,6 +1,13 @@
 import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
 import { instantColumn } from './columns.js';
 
+/** What a session keeps of the sign-in, within `data`. */
+export interface SessionDevice {
+  beganAt: string;
+  browser: string | null;
+  system: string | null;
+}
+
 /** A browser's session. The id is kept as a hash: a stolen table opens no session. */
 @Entity({ name: 'session' })
 export class SessionEntity {

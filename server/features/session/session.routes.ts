@@ -3,9 +3,14 @@ import type { Request, RequestHandler, Router } from 'express';
 import type { Authenticator } from 'passport';
 import type { Person } from '../../http/actor.js';
 import { AppError } from '../../http/app-error.js';
+import type { Clock } from '../../http/context.js';
 import { csrfTokenOf } from '../../http/csrf.js';
 import { signInLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
+import { wholeList } from '../../http/reply.js';
+import { sessionHash } from '../../http/session-store.js';
+import { describeBrowser } from './describe-browser.js';
+import type { DevicesService } from './devices.service.js';
 import { toSessionState } from './session.mapper.js';
 import type { SessionService } from './session.service.js';
 
@@ -13,7 +18,9 @@ export function sessionRoutes(
   router: Router,
   mount: Mount,
   service: SessionService,
+  devices: DevicesService,
   passport: Authenticator,
+  clock: Clock,
 ): void {
   const stateOf = async (request: Request, person: Person | null) =>
     toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request, true));
@@ -32,7 +39,7 @@ export function sessionRoutes(
   mount.forAnybody(sessionEndpoints.signIn, async ({ request }) => {
     const person = await authenticate(passport, request);
     if (person === null) throw new AppError('wrong-credentials');
-    await logIn(request, person);
+    await logIn(request, person, clock.now());
     return stateOf(request, person);
   });
   mount.forAnybody(sessionEndpoints.signOut, async ({ request }) => {
@@ -41,18 +48,30 @@ export function sessionRoutes(
   });
   mount.forPerson(sessionEndpoints.changePassword, async ({ request, body }, person) => {
     await service.changePassword(person, body);
-    await logIn(request, person);
+    await logIn(request, person, clock.now());
     return stateOf(request, person);
   });
   mount.forAnybody(sessionEndpoints.redeemCode, async ({ request, body }) => {
     const person = await service.redeemCode(body);
-    await logIn(request, person);
+    await logIn(request, person, clock.now());
     return stateOf(request, person);
   });
   mount.forAnybody(sessionEndpoints.firstSteward, async ({ request, body }) => {
     const person = await service.setUpFirstSteward(body);
-    await logIn(request, person);
+    await logIn(request, person, clock.now());
     return stateOf(request, person);
+  });
+
+  mount.forPerson(sessionEndpoints.listDevices, async ({ request }, person) =>
+    wholeList(await devices.list(person, sessionHash(request.sessionID))),
+  );
+  mount.forPerson(sessionEndpoints.endDevice, async ({ params }, person) => {
+    await devices.end(person, params.deviceId);
+    return undefined;
+  });
+  mount.forPerson(sessionEndpoints.endOtherDevices, async ({ request }, person) => {
+    await devices.endOthers(person, sessionHash(request.sessionID));
+    return undefined;
   });
 
   /** Reading keeps the token of the session: several tabs share one. */
@@ -77,11 +96,18 @@ function authenticate(passport: Authenticator, request: Request): Promise<Person
 }
 
 /** passport gives the session a new id here, so that an id from before the sign-in opens nothing. */
-function logIn(request: Request, person: Person): Promise<void> {
+function logIn(request: Request, person: Person, at: Date): Promise<void> {
   return new Promise((resolve, reject) => {
     request.logIn(person, (error: unknown) => {
-      if (error) reject(asError(error));
-      else resolve();
+      if (error) {
+        reject(asError(error));
+        return;
+      }
+      request.session.device = {
+        beganAt: at.toISOString(),
+        ...describeBrowser(request.get('User-Agent')),
+      };
+      resolve();
     });
   });
 }

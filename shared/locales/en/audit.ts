@@ -13,6 +13,7 @@ export const texts = {
     'code-renewed': '{{actor}} made a new code for {{subject}}.',
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',
+    'devices-signed-out': '{{actor}} signed out on other devices.',
     'community-founded': '{{actor}} set up {{subject}}.',
     'settings-changed': '{{actor}} changed the settings: {{fields}}.',
     'place-added': '{{actor}} added the place {{subject}}.',

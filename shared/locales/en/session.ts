@@ -35,6 +35,18 @@ export const texts = {
     villageName: 'Name of the village',
     submit: 'Set it up',
   },
+  devices: {
+    title: 'Where you are signed in',
+    here: 'this device',
+    name: '{{browser}} on {{system}}',
+    unknown: 'A browser that does not say what it is',
+    began: 'Signed in {{when}}.',
+    lastUsed: 'Last used {{when}}.',
+    end: 'Sign out there: {{device}}',
+    ended: 'Signed out there: {{device}}.',
+    endOthers: 'Sign out everywhere but here',
+    othersEnded: 'All other devices are signed out.',
+  },
   account: {
     title: 'You and this device',
     signedInAs: 'Signed in as {{name}}',

@@ -14,6 +14,7 @@ import { useToast } from '#src/ui/toast.js';
 import { TroubleNote } from '#src/ui/waiting.js';
 import { useSignOut } from '../api/session-mutations.js';
 import { ChangePasswordForm } from './change-password-form.js';
+import { DevicesBoard } from './devices-board.js';
 
 /** The person and their device: village on screen, look, password, sign out. */
 export function AccountPage() {
@@ -36,6 +37,7 @@ export function AccountPage() {
           <Board title={t('account.changePassword')}>
             <ChangePasswordForm />
           </Board>
+          <DevicesBoard />
           {signOut.error !== null && <TroubleNote sentence={words.problem(signOut.error)} />}
           <div>
             <Button
