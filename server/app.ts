@@ -16,6 +16,13 @@ import { driftRoutes } from './features/drift/drift.routes.js';
 import { DriftService } from './features/drift/drift.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
+import { LetterChoicesService } from './features/letters/letter-choices.service.js';
+import { LetterPlannerService } from './features/letters/letter-planner.service.js';
+import { LetterRounds } from './features/letters/letter-rounds.service.js';
+import { LetterSenderService } from './features/letters/letter-sender.service.js';
+import { LetterWriterService } from './features/letters/letter-writer.service.js';
+import { lettersRoutes } from './features/letters/letters.routes.js';
+import { LettersService } from './features/letters/letters.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
@@ -56,14 +63,23 @@ import { BODY_LIMIT } from './http/limits.js';
 import { Mount } from './http/mount.js';
 import { nothingHere, problemHandler } from './http/problem-handler.js';
 import { sessions } from './http/session.js';
+import { inboxPage } from './mail/inbox-page.js';
+import type { DevInbox } from './mail/inbox.js';
+import type { Mailer } from './mail/mailer.js';
 
 export interface AppOptions extends AppContext {
+  /** Null where letters are switched off. */
+  mailer: Mailer | null;
+  /** The inbox of development, to be read at /dev/letters; null everywhere else. */
+  inbox?: DevInbox | null;
   productVersion: string;
   /** Folder of the built client; null in tests and in development, where Vite serves it. */
   clientDir: string | null;
 }
 
 export interface App {
+  /** Looks what waits and sends what is due; null where letters are switched off. */
+  letters: LetterRounds | null;
   express: Express;
   /** Ids of the endpoints that answer. */
   mountedIds: readonly string[];
@@ -145,14 +161,35 @@ export function createApp(options: AppOptions): App {
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers);
   todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, clock }));
+  const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
+  lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   auditRoutes(mount, new AuditListService(dataSource));
 
   app.use(router);
   app.use('/api', nothingHere);
+  if (options.inbox) serveInbox(app, options.inbox);
   if (clientDir !== null) serveClient(app, clientDir);
   app.use(nothingHere);
   app.use(problemHandler(log));
-  return { express: app, mountedIds: mount.ids };
+  return { express: app, mountedIds: mount.ids, letters: letterRounds(options) };
+}
+
+function letterRounds({ dataSource, clock, config, mailer }: AppOptions): LetterRounds | null {
+  if (mailer === null) return null;
+  const writer = new LetterWriterService(dataSource, clock, {
+    publicUrl: config.publicUrl,
+    serverSecret: config.sessionSecret,
+    from: config.mail.from,
+  });
+  const sender = new LetterSenderService(dataSource, clock, writer, mailer);
+  return new LetterRounds(new LetterPlannerService(dataSource, clock), sender);
+}
+
+function serveInbox(app: Express, inbox: DevInbox): void {
+  app.get('/dev/letters', (_request, response) => {
+    response.setHeader('Cache-Control', 'no-store');
+    response.send(inboxPage(inbox.letters()));
+  });
 }
 
 /** Files of the build never change under their name; every other path is a page of the client. */

@@ -8,11 +8,15 @@ import { ConfigError, readConfig, type Config } from './config/env.js';
 import { createDataSource } from './db/data-source.js';
 import { DatabaseUnfitError, migrate } from './db/migrate.js';
 import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
+import { removeOldLetters } from './features/letters/letter-rounds.service.js';
 import { removeExpiredSessions } from './features/session/end-sessions.service.js';
 import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
+import type { DevInbox } from './mail/inbox.js';
+import { createSmtpMailer } from './mail/smtp-mailer.js';
 
 const DAY_MS = 24 * 60 * 60 * 1000;
+const LETTER_ROUND_MS = 20_000;
 
 /** A reason not to start that the person at the machine can mend: one sentence, no stack. */
 class StartRefused extends Error {}
@@ -26,7 +30,12 @@ async function main(): Promise<void> {
   try {
     await migrate(dataSource);
     await prepareAccounts(dataSource, config, clock);
-    const { express } = createApp({
+    const inbox = await openInbox(config);
+    const smtpUrl = inbox?.smtpUrl ?? config.mail.smtpUrl;
+    const mailer = smtpUrl === null ? null : createSmtpMailer({ url: smtpUrl, from: config.mail.from });
+    const { express, letters } = createApp({
+      mailer,
+      inbox,
       dataSource,
       config,
       clock,
@@ -36,8 +45,16 @@ async function main(): Promise<void> {
     });
     const server = await listen(express, config);
     log.info({ address: config.publicUrl }, 'listening');
-    tidySessionsDaily(dataSource, clock, log);
-    closeOnSignal(server, dataSource, log);
+    tidyDaily(dataSource, clock, log);
+    if (letters === null) log.info('letters by e-mail are off: SMTP_URL is not set');
+    letters?.start(LETTER_ROUND_MS, (error) => {
+      log.warn({ err: error }, 'letters wait for the next round');
+    });
+    closeOnSignal(server, log, async () => {
+      await letters?.close();
+      await inbox?.close();
+      await dataSource.destroy();
+    });
   } catch (error) {
     await dataSource.destroy();
     throw error;
@@ -62,6 +79,13 @@ async function prepareAccounts(dataSource: DataSource, config: Config, clock: Cl
   }
 }
 
+/** Loaded only where it is wanted, so that a product on a server never holds a mail server. */
+async function openInbox({ mail }: Config): Promise<DevInbox | null> {
+  if (mail.inboxPort === null) return null;
+  const { startDevInbox } = await import('./mail/dev-inbox.js');
+  return startDevInbox(mail.inboxPort);
+}
+
 function listen(express: ReturnType<typeof createApp>['express'], config: Config): Promise<Server> {
   return new Promise((resolve, reject) => {
     const server = express.listen(config.port, config.host, (error?: Error) => {
@@ -76,10 +100,13 @@ function listen(express: ReturnType<typeof createApp>['express'], config: Config
   });
 }
 
-function tidySessionsDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
+function tidyDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
   const tidy = () => {
-    removeExpiredSessions(dataSource.manager, clock.now()).catch((error: unknown) => {
-      log.warn({ err: error }, 'old sessions stay for another day');
+    Promise.all([
+      removeExpiredSessions(dataSource.manager, clock.now()),
+      removeOldLetters(dataSource.manager, clock.now()),
+    ]).catch((error: unknown) => {
+      log.warn({ err: error }, 'old sessions and letters stay for another day');
     });
   };
   tidy();
@@ -88,13 +115,13 @@ function tidySessionsDaily(dataSource: DataSource, clock: Clock, log: Logger): v
 }
 
 /** Answers what has begun, then lets go of the database; a second signal does not hurry it into a loss. */
-function closeOnSignal(server: Server, dataSource: DataSource, log: Logger): void {
+function closeOnSignal(server: Server, log: Logger, letGo: () => Promise<void>): void {
   let closing = false;
   const close = () => {
     if (closing) return;
     closing = true;
     server.close(() => {
-      void dataSource.destroy().finally(() => {
+      void letGo().finally(() => {
         log.info('closed');
       });
     });

@@ -15,7 +15,7 @@ export function welcome(address, demo) {
   if (demo) {
     lines.push('  Demo accounts, all with the password limewash-and-pegs:');
     for (const name of demoPeople) lines.push(`    ${name}@dawnpeg.example`);
-    lines.push('');
+    lines.push('', `  Letters of the demo are read at ${address}/dev/letters`, '');
   }
   lines.push('  Ctrl-C stops it; nothing is lost.', '');
   process.stdout.write(`${lines.join('\n')}\n`);

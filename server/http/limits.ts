@@ -6,6 +6,8 @@ export const BODY_LIMIT = '1mb';
 const QUARTER_HOUR_MS = 15 * 60 * 1000;
 const FAILED_TRIES_PER_ACCOUNT = 10;
 const FAILED_TRIES_PER_ADDRESS = 50;
+const LETTERS_PER_ACCOUNT = 5;
+const LETTERS_PER_ADDRESS = 30;
 
 /** Slows down guessing of passwords and codes: per account and per network address, failures only. */
 export function signInLimits(): RequestHandler[] {
@@ -15,12 +17,24 @@ export function signInLimits(): RequestHandler[] {
   ];
 }
 
-function limit(tries: number, keyGenerator: (request: Request) => string): RequestHandler {
+/** Letters that anybody may ask for: every asking counts. */
+export function letterLimits(): RequestHandler[] {
+  return [
+    limit(LETTERS_PER_ADDRESS, (request) => ipKeyGenerator(request.ip ?? ''), false),
+    limit(LETTERS_PER_ACCOUNT, (request) => `account:${accountOf(request)}`, false),
+  ];
+}
+
+function limit(
+  tries: number,
+  keyGenerator: (request: Request) => string,
+  failuresOnly = true,
+): RequestHandler {
   return rateLimit({
     windowMs: QUARTER_HOUR_MS,
     limit: tries,
     keyGenerator,
-    skipSuccessfulRequests: true,
+    skipSuccessfulRequests: failuresOnly,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
     handler: () => {

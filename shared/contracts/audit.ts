@@ -10,6 +10,8 @@ export const AUDIT_ACTIONS = [
   'membership-ended',
   'password-set',
   'devices-signed-out',
+  'letters-chosen',
+  'invitation-sent',
   'community-founded',
   'settings-changed',
   'place-added',

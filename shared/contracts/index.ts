@@ -6,6 +6,7 @@ import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { healthEndpoints } from './health.js';
 import { moonsEndpoints } from './moons.js';
+import { lettersEndpoints } from './letters.js';
 import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
 import { reviewsEndpoints } from './reviews.js';
@@ -20,6 +21,7 @@ import { versionsEndpoints } from './versions.js';
 export const ENDPOINTS: readonly Endpoint[] = [
   healthEndpoints,
   sessionEndpoints,
+  lettersEndpoints,
   peopleEndpoints,
   placesEndpoints,
   starsEndpoints,

@@ -15,6 +15,7 @@ export const PROBLEM_TYPES = {
   'wrong-content-type': { status: 415, title: 'Send JSON' },
   'invalid-input': { status: 422, title: 'Some fields need a change' },
   'code-not-valid': { status: 422, title: 'This code is not valid any more' },
+  'link-not-valid': { status: 422, title: 'This link is not valid any more' },
   'too-many-attempts': { status: 429, title: 'Too many tries' },
   'something-broke': { status: 500, title: 'Something went wrong on our side' },
   'database-unreachable': { status: 503, title: 'The records cannot be reached' },

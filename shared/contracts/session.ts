@@ -32,6 +32,13 @@ export type ChangePasswordInput = z.infer<typeof changePasswordInput>;
 export const redeemCodeInput = z.strictObject({ email, code: oneTimeCode, newPassword });
 export type RedeemCodeInput = z.infer<typeof redeemCodeInput>;
 
+/** The token of a letter: the letter’s id and its secret. */
+export const resetPasswordInput = z.strictObject({
+  token: z.string().regex(/^[0-9a-f-]{36}\.[0-9A-F]{64}$/u, 'link-broken'),
+  newPassword,
+});
+export type ResetPasswordInput = z.infer<typeof resetPasswordInput>;
+
 export const firstStewardInput = z.strictObject({
   token: z.string().min(20, 'required').max(200, 'too-long'),
   email,
@@ -97,6 +104,15 @@ export const sessionEndpoints = {
     summary: 'Set a password with a one-time code from the steward, and sign in',
     access: anybody,
     body: redeemCodeInput,
+    response: sessionState,
+  }),
+  resetPassword: defineEndpoint({
+    id: 'resetPassword',
+    method: 'POST',
+    path: '/api/session/reset',
+    summary: 'Set a new password with the link of a letter, and sign in',
+    access: anybody,
+    body: resetPasswordInput,
     response: sessionState,
   }),
   firstSteward: defineEndpoint({

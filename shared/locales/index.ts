@@ -6,6 +6,7 @@ import { texts as drift } from './en/drift.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
 import { texts as moons } from './en/moons.js';
+import { texts as letters } from './en/letters.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
@@ -26,6 +27,7 @@ export const en = {
   common,
   session,
   files,
+  letters,
   people,
   places,
   stars,

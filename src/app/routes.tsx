@@ -15,12 +15,13 @@ export interface AppRoute {
 /** Screens before the door: anybody may open them. */
 export const doorRoutes: readonly AppRoute[] = [
   { path: PATTERNS.signIn, texts: ['session'], load: () => import('./routes/sign-in.js') },
+  { path: PATTERNS.reset, texts: ['session', 'letters'], load: () => import('./routes/reset.js') },
   { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
 ];
 
 /** Screens that work for a signed-in person without any village. */
 export const personRoutes: readonly AppRoute[] = [
-  { path: PATTERNS.account, texts: ['session'], load: () => import('./routes/account.js') },
+  { path: PATTERNS.account, texts: ['session', 'letters'], load: () => import('./routes/account.js') },
 ];
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
@@ -41,6 +42,11 @@ export const villageRoutes: readonly AppRoute[] = [
     load: () => import('./routes/village-places.js'),
   },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  {
+    path: PATTERNS.villageAsking,
+    texts: ['people', 'letters'],
+    load: () => import('./routes/village-asking.js'),
+  },
   { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
   {
     path: PATTERNS.calendar,

@@ -3,6 +3,7 @@ export const PATTERNS = {
   today: '/',
   signIn: '/sign-in',
   welcome: '/welcome',
+  reset: '/reset',
   account: '/account',
   stars: '/stars',
   moons: '/stars/moons',
@@ -17,6 +18,7 @@ export const PATTERNS = {
   villagePlaces: '/village/places',
   villageSettings: '/village/settings',
   villageRecords: '/village/records',
+  villageAsking: '/village/asking',
   calendars: '/calendars',
   calendar: '/calendars/:calendarId',
   versions: '/calendars/:calendarId/versions',
@@ -54,6 +56,7 @@ export const paths = {
   /** The code travels behind the hash: it never reaches a server's log. */
   welcome: (code?: string) =>
     code === undefined ? PATTERNS.welcome : `${PATTERNS.welcome}#code=${encodeURIComponent(code)}`,
+  reset: () => PATTERNS.reset,
   account: () => PATTERNS.account,
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
   moons: (query: { year?: number } = {}) => withQuery(PATTERNS.moons, query),
@@ -74,6 +77,7 @@ export const paths = {
   villagePlaces: () => PATTERNS.villagePlaces,
   villageSettings: () => PATTERNS.villageSettings,
   villageRecords: () => PATTERNS.villageRecords,
+  villageAsking: () => PATTERNS.villageAsking,
   /** With a marker, the person chooses a calendar and a new entry then goes by it. */
   calendars: (query: MarkerQuery = {}) => withQuery(PATTERNS.calendars, { ...query }),
   calendar: (calendarId: string, query: { entry?: string } & MarkerQuery = {}) =>

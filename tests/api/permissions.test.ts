@@ -163,6 +163,18 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     signIn: () => ({ email: 'observer@dawnpeg.example', password: DEMO_PASSWORD }),
     changePassword: () => ({ currentPassword: 'not mine', newPassword: 'never comes to be' }),
     redeemCode: () => ({ email: 'a@example.org', code: 'ABCD-EFGH-JKMN', newPassword: 'never comes to be' }),
+    resetPassword: () => ({
+      token: `${village.personId}.${'0'.repeat(64)}`,
+      newPassword: 'never comes to be',
+    }),
+    askForResetLetter: () => ({ email: 'a@example.org' }),
+    saveLetterChoice: () => ({
+      channel: 'none',
+      rhythm: 'each',
+      visitMe: false,
+      quietHours: null,
+      ...stale,
+    }),
     setUpFirstSteward: () => ({
       token: 'there is no such token',
       email: 'a@example.org',

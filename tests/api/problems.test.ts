@@ -170,6 +170,7 @@ describe('while the database cannot be reached', () => {
       log: pino({ level: 'silent' }),
       productVersion: 'test',
       clientDir: null,
+      mailer: null,
     });
     const agent = request.agent(express);
     const { csrfToken } = (await agent.get('/api/session')).body as { csrfToken: string };

@@ -6,6 +6,7 @@ import { createApp, type App } from '#server/app.js';
 import { parseConfig } from '#server/config/env.js';
 import { DEMO_DOMAIN, DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { seedDemoVillages } from '#server/features/demo/demo.service.js';
+import type { Mailer } from '#server/mail/mailer.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { emptyTestDatabase, openTestDatabase } from './database.js';
 
@@ -40,7 +41,7 @@ export interface Client {
 }
 
 /** The product on this worker's own database, with the demo villages and a clock that stands still. */
-export async function openTestApi(): Promise<TestApi> {
+export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } = {}): Promise<TestApi> {
   const dataSource = await openTestDatabase();
   let now = TEST_NOW;
   const clock = {
@@ -57,6 +58,7 @@ export async function openTestApi(): Promise<TestApi> {
   const build = () =>
     createApp({
       dataSource,
+      mailer,
       clock,
       config,
       log: pino({ level: 'silent' }),

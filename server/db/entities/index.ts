@@ -5,6 +5,8 @@ import { CalendarEntity } from './calendar.entity.js';
 import { CommunityEntity } from './community.entity.js';
 import { DraftContributionEntity } from './draft-contribution.entity.js';
 import { EntryEntity } from './entry.entity.js';
+import { LetterChoiceEntity } from './letter-choice.entity.js';
+import { LetterEntity } from './letter.entity.js';
 import { MembershipEntity } from './membership.entity.js';
 import { OneTimeCodeEntity } from './one-time-code.entity.js';
 import { PersonEntity } from './person.entity.js';
@@ -29,4 +31,6 @@ export const ENTITIES = [
   AnswerEntity,
   SignatureEntity,
   AuditEventEntity,
+  LetterEntity,
+  LetterChoiceEntity,
 ];

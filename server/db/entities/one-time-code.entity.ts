@@ -2,14 +2,17 @@ import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relat
 import { codeColumn, instantColumn, sha256Column } from './columns.js';
 import { PersonEntity } from './person.entity.js';
 
-/** A code that lets somebody set a password once: for a person whom a steward added, or for the first steward. */
+/**
+ * A code that lets somebody set a password once: for a person whom a steward added, for the first steward, or after
+ * a forgotten password.
+ */
 @Entity({ name: 'one_time_code' })
 export class OneTimeCodeEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
   @Column(codeColumn(16))
-  purpose!: 'join' | 'first-steward';
+  purpose!: 'join' | 'first-steward' | 'reset';
 
   @Index('one_time_code_person')
   @Column({ name: 'person_id', type: 'uuid', nullable: true })

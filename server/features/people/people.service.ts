@@ -163,7 +163,12 @@ export class PeopleService {
     personIds: readonly string[],
   ): Promise<Map<string, OneTimeCodeEntity>> {
     const codes = await manager.find(OneTimeCodeEntity, {
-      where: { personId: In([...personIds]), usedAt: IsNull(), expiresAt: MoreThan(this.clock.now()) },
+      where: {
+        purpose: 'join',
+        personId: In([...personIds]),
+        usedAt: IsNull(),
+        expiresAt: MoreThan(this.clock.now()),
+      },
     });
     return new Map(codes.map((code) => [code.personId ?? '', code]));
   }

@@ -9,6 +9,22 @@ export const CODE_TRIES = 10;
 /** A fresh code, in groups of four for reading. */
 export function newCode(): string {
   const letters = Array.from({ length: LENGTH }, () => ALPHABET[randomInt(ALPHABET.length)]).join('');
+  return grouped(letters);
+}
+
+/** A code from a number that is large and known to nobody, such as a digest. */
+export function codeOf(number: bigint): string {
+  const base = BigInt(ALPHABET.length);
+  let rest = number;
+  let letters = '';
+  while (letters.length < LENGTH) {
+    letters += ALPHABET[Number(rest % base)] ?? '';
+    rest /= base;
+  }
+  return grouped(letters);
+}
+
+function grouped(letters: string): string {
   return letters.replace(/(.{4})(?=.)/gu, '$1-');
 }
 

@@ -31,6 +31,7 @@ export function sessionRoutes(
     sessionEndpoints.signIn,
     sessionEndpoints.redeemCode,
     sessionEndpoints.firstSteward,
+    sessionEndpoints.resetPassword,
   ]) {
     router[method.toLowerCase() as 'post'](path, perAddress, perAccount);
   }
@@ -53,6 +54,11 @@ export function sessionRoutes(
   });
   mount.forAnybody(sessionEndpoints.redeemCode, async ({ request, body }) => {
     const person = await service.redeemCode(body);
+    await logIn(request, person, clock.now());
+    return stateOf(request, person);
+  });
+  mount.forAnybody(sessionEndpoints.resetPassword, async ({ request, body }) => {
+    const person = await service.resetPassword(body);
     await logIn(request, person, clock.now());
     return stateOf(request, person);
   });

@@ -1,4 +1,9 @@
-import type { ChangePasswordInput, FirstStewardInput, RedeemCodeInput } from '#shared/contracts/session.js';
+import type {
+  ChangePasswordInput,
+  FirstStewardInput,
+  RedeemCodeInput,
+  ResetPasswordInput,
+} from '#shared/contracts/session.js';
 import { randomUUID, timingSafeEqual } from 'node:crypto';
 import { IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
@@ -71,6 +76,30 @@ export class SessionService {
     });
     if (person === null) throw new AppError('code-not-valid');
     return person;
+  }
+
+  /** The link of a letter. It works once, and every other such link of the person is void with it. */
+  async resetPassword({ token, newPassword }: ResetPasswordInput): Promise<Person> {
+    const newHash = await hashPassword(newPassword);
+    const now = this.clock.now();
+    return inTransaction(this.dataSource, async (manager) => {
+      const code = await manager.findOne(OneTimeCodeEntity, {
+        where: {
+          id: token.split('.')[0] ?? '',
+          purpose: 'reset',
+          usedAt: IsNull(),
+          expiresAt: MoreThan(now),
+        },
+        lock: { mode: 'pessimistic_write' },
+      });
+      if (!code?.personId || !sameHash(code.codeHash, codeHash(token))) {
+        throw new AppError('link-not-valid');
+      }
+      const { personId } = code;
+      await manager.update(OneTimeCodeEntity, { personId, usedAt: IsNull() }, { usedAt: now });
+      await this.setPassword(manager, personId, newHash);
+      return manager.findOneByOrFail(PersonEntity, { id: personId });
+    });
   }
 
   /** Founds the first community. The link works once. */

@@ -14,6 +14,8 @@ export const texts = {
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',
     'devices-signed-out': '{{actor}} signed out on other devices.',
+    'letters-chosen': '{{actor}} chose how to be asked.',
+    'invitation-sent': '{{actor}} sent {{subject}} an invitation by e-mail.',
     'community-founded': '{{actor}} set up {{subject}}.',
     'settings-changed': '{{actor}} changed the settings: {{fields}}.',
     'place-added': '{{actor}} added the place {{subject}}.',

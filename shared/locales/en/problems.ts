@@ -18,6 +18,7 @@ export const texts = {
     'wrong-content-type': 'Send the data as JSON.',
     'invalid-input': 'Some fields need another look. Nothing you typed is lost.',
     'code-not-valid': 'This code has been used, has run out or is not right. Ask the steward for a new one.',
+    'link-not-valid': 'This link has been used or has run out. Ask for a new one.',
     'too-many-attempts': 'Too many tries in a short time. Wait a quarter of an hour, then try again.',
     'something-broke': 'Something went wrong on our side. Nothing was changed; try again in a moment.',
     'database-unreachable':
@@ -56,6 +57,7 @@ export const texts = {
     'set-up-done': 'The first steward has been set up already. Sign in instead.',
     'not-an-elder': 'This person is no elder of the village, so no answer can be written down for them.',
     'members-missing': 'The sign-off rule may name elders of this village only.',
+    'letters-off': 'Letters by e-mail are switched off here. Give a code on paper.',
     'rule-impossible': 'There are fewer elders in the village than the rule asks for.',
   },
   field: {
@@ -73,6 +75,7 @@ export const texts = {
     'not-an-email': 'Write a whole e-mail address, such as name@example.org.',
     'password-too-short': 'Use at least 10 characters. A short sentence is easy to remember.',
     'code-length': 'A code has twelve letters and digits.',
+    'link-broken': 'The link is not whole. Open it from the letter again.',
     'wrong-current-password': 'This is not your present password.',
     'language-tag': 'Write a language tag such as en or fr-CA.',
     'at-least-one-elder': 'At least one elder has to sign.',

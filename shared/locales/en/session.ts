@@ -13,7 +13,7 @@ export const texts = {
     haveCode: 'I have a code',
     haveCodeHint: 'A steward gave you a code of letters and numbers: start here.',
     needed: 'Sign in to go on. You come back to the page you wanted.',
-    forgotten: 'Forgotten? The steward of your village can give you a new code.',
+    forgotten: 'I have forgotten my password',
   },
   welcome: {
     title: 'Start with your code',

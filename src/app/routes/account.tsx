@@ -1,1 +1,6 @@
-export { AccountPage as Component } from '#src/features/session/components/account-page.js';
+import { LetterChoiceBoard } from '#src/features/letters/components/letter-choice-board.js';
+import { AccountPage } from '#src/features/session/components/account-page.js';
+
+export function Component() {
+  return <AccountPage letters={<LetterChoiceBoard />} />;
+}

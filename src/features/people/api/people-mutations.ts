@@ -1,4 +1,5 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { lettersEndpoints } from '#shared/contracts/letters.js';
 import {
   peopleEndpoints,
   type CommunityUpdate,
@@ -28,6 +29,13 @@ export function useRenewCode(communityId: string) {
   return useMutation({
     mutationFn: (personId: string) =>
       callApi(peopleEndpoints.renewCode, { params: { communityId, personId } }),
+    onSettled: useRefreshPeople(communityId),
+  });
+}
+
+export function useSendInvitation(communityId: string) {
+  return useMutation({
+    mutationFn: (personId: string) => callApi(lettersEndpoints.invite, { params: { communityId, personId } }),
     onSettled: useRefreshPeople(communityId),
   });
 }

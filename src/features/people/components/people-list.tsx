@@ -1,4 +1,4 @@
-import { KeyRound, Pencil, UserMinus } from 'lucide-react';
+import { KeyRound, Mail, Pencil, UserMinus } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import type { CommunityPerson } from '#shared/contracts/people.js';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -10,6 +10,7 @@ export interface PersonActions {
   onEdit: (person: CommunityPerson) => void;
   onRemove: (person: CommunityPerson) => void;
   onRenewCode: (person: CommunityPerson) => void;
+  onInvite: (person: CommunityPerson) => void;
 }
 
 /** Everybody of the village; with actions for the steward, without them for everybody else. */
@@ -93,6 +94,17 @@ function CodeLine({ person, actions }: { person: CommunityPerson; actions: Perso
           }}
         >
           {t('code.renew')}
+        </Button>
+      )}
+      {actions !== null && (
+        <Button
+          look="quiet"
+          icon={<Mail aria-hidden size={20} />}
+          onClick={() => {
+            actions.onInvite(person);
+          }}
+        >
+          {t('code.sendLetter')}
         </Button>
       )}
     </div>

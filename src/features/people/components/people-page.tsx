@@ -9,7 +9,7 @@ import { Columns, Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
-import { useAddPerson, useRemovePerson, useRenewCode } from '../api/people-mutations.js';
+import { useAddPerson, useRemovePerson, useRenewCode, useSendInvitation } from '../api/people-mutations.js';
 import { peopleQuery } from '../api/people-queries.js';
 import { AddPersonForm } from './add-person-form.js';
 import { CodeDialog, type IssuedCode } from './code-dialog.js';
@@ -83,6 +83,7 @@ function usePersonActions(
   const say = useToast();
   const words = useProblemWords();
   const renew = useRenewCode(communityId);
+  const invite = useSendInvitation(communityId);
   const remove = useRemovePerson(communityId);
   const add = useAddPerson(communityId);
   const tell = (cause: unknown) => {
@@ -103,6 +104,14 @@ function usePersonActions(
   };
   return {
     onEdit,
+    onInvite: (person) => {
+      invite.mutate(person.id, {
+        onSuccess: () => {
+          say(t('code.letterSent', { email: person.email }));
+        },
+        onError: tell,
+      });
+    },
     onRenewCode: (person) => {
       renew.mutate(person.id, {
         onSuccess: ({ oneTimeCode }) => {

@@ -14,6 +14,7 @@ export function VillageTabs() {
       links={[
         { to: paths.villagePlaces(), label: t('tabs.places') },
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
+        ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),
         { to: paths.villageSettings(), label: t('tabs.settings') },
         ...(inner ? [{ to: paths.villageRecords(), label: t('tabs.records') }] : []),
       ]}

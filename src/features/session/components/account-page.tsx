@@ -1,4 +1,5 @@
 import { LogOut } from 'lucide-react';
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useCommunityChoice } from '#src/lib/community.js';
 import { listWords } from '#src/lib/list-words.js';
@@ -17,7 +18,7 @@ import { ChangePasswordForm } from './change-password-form.js';
 import { DevicesBoard } from './devices-board.js';
 
 /** The person and their device: village on screen, look, password, sign out. */
-export function AccountPage() {
+export function AccountPage({ letters }: { letters?: ReactNode }) {
   const { t } = useTranslation(['session', 'common']);
   const { person } = useSession();
   const words = useProblemWords();
@@ -29,6 +30,7 @@ export function AccountPage() {
       <Columns>
         <div className="grid gap-4">
           <VillageBoard />
+          {letters}
           <Board title={t('account.screen')}>
             <ThemePick />
           </Board>

@@ -76,7 +76,11 @@ export function SignInPage() {
           {t('signIn.haveCode')}
         </Link>
         <p className="text-small text-umber-soft">{t('signIn.haveCodeHint')}</p>
-        <p className="mt-3 text-small text-umber-soft">{t('signIn.forgotten')}</p>
+        <p className="mt-3">
+          <Link className="link-line" to={paths.reset()}>
+            {t('signIn.forgotten')}
+          </Link>
+        </p>
       </div>
     </Door>
   );

@@ -1,0 +1,1 @@
+export { ResetPage as Component } from '#src/features/session/components/reset-page.js';
