@@ -33,6 +33,10 @@ import { MoonsService } from './features/moons/moons.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
 import { SigningService } from './features/reviews/signing.service.js';
+import { LookCardService } from './features/look/look-card.service.js';
+import { LookSeasonService } from './features/look/look-season.service.js';
+import { lookRoutes } from './features/look/look.routes.js';
+import { LookService } from './features/look/look.service.js';
 import { placesRoutes } from './features/places/places.routes.js';
 import { PlacesService } from './features/places/places.service.js';
 import { DevicesService } from './features/session/devices.service.js';
@@ -163,6 +167,8 @@ export function createApp(options: AppOptions): App {
   todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, clock }));
   const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
+  const looks = new LookService(places, new LookSeasonService(skyYears), clock);
+  lookRoutes(mount, looks, new LookCardService(looks));
   auditRoutes(mount, new AuditListService(dataSource));
 
   app.use(router);

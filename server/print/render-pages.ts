@@ -2,7 +2,7 @@ import { setImmediate } from 'node:timers/promises';
 import PDFDocument from 'pdfkit';
 import { pathsOf } from '#shared/sheet/page-paths.js';
 import type { PathOp } from '#shared/sheet/page-paths.js';
-import type { Ink, SheetPage, TextPrimitive } from '#shared/sheet/primitives.js';
+import type { DrawnPage, Ink, TextPrimitive } from '#shared/sheet/primitives.js';
 import { MM_PER_PT } from '#shared/sheet/units.js';
 import { fontFile, textRuns } from './font-book.js';
 import type { FaceName, FontWeight } from './font-book.js';
@@ -21,7 +21,7 @@ const COLOURS: Record<Ink, string> = { ink: '#000000', paper: '#ffffff', grey: '
 const OUTLINE_MM = 0.6;
 
 /** Draws laid-out pages as a PDF at true scale. Lets other work run between pages. */
-export async function renderPages(pages: readonly SheetPage[], about: PdfAbout): Promise<Buffer> {
+export async function renderPages(pages: readonly DrawnPage[], about: PdfAbout): Promise<Buffer> {
   const doc = new PDFDocument({
     autoFirstPage: false,
     margin: 0,

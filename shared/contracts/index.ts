@@ -5,6 +5,7 @@ import { calendarsEndpoints } from './calendars.js';
 import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { healthEndpoints } from './health.js';
+import { lookEndpoints } from './look.js';
 import { moonsEndpoints } from './moons.js';
 import { lettersEndpoints } from './letters.js';
 import { peopleEndpoints } from './people.js';
@@ -36,4 +37,5 @@ export const ENDPOINTS: readonly Endpoint[] = [
   sheetsEndpoints,
   auditEndpoints,
   todayEndpoints,
+  lookEndpoints,
 ].flatMap((group) => Object.values(group) as Endpoint[]);

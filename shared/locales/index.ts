@@ -7,6 +7,7 @@ import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
+import { texts as look } from './en/look.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
@@ -28,6 +29,7 @@ export const en = {
   session,
   files,
   letters,
+  look,
   people,
   places,
   stars,

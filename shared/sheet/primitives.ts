@@ -29,7 +29,18 @@ export interface RingPrimitive {
   readonly dashed: boolean;
 }
 
-export type LineRole = 'rule' | 'bracket' | 'crop' | 'row' | 'trim' | 'arrow' | 'cut';
+export type LineRole =
+  | 'rule'
+  | 'bracket'
+  | 'crop'
+  | 'row'
+  | 'trim'
+  | 'arrow'
+  | 'cut'
+  | 'skyline'
+  | 'ground'
+  | 'star-path'
+  | 'stop';
 
 export interface LinePrimitive {
   readonly type: 'line';
@@ -43,7 +54,7 @@ export interface LinePrimitive {
 }
 
 export type RectRole =
-  'best' | 'margin' | 'watch' | 'last-advised' | 'tag' | 'flap' | 'tile-map' | 'clearing';
+  'best' | 'margin' | 'watch' | 'last-advised' | 'tag' | 'flap' | 'tile-map' | 'clearing' | 'rod';
 
 /** `hatch` is drawn as an outline filled by slanted lines. */
 export interface RectPrimitive extends Box {
@@ -57,7 +68,7 @@ export interface RectPrimitive extends Box {
 
 export interface DiscPrimitive {
   readonly type: 'disc';
-  readonly role: 'moon' | 'tag' | 'clearing';
+  readonly role: 'moon' | 'tag' | 'clearing' | 'star-path';
   readonly cx: number;
   readonly cy: number;
   readonly radius: number;
@@ -130,15 +141,20 @@ export type Primitive =
 
 export type PageKind = 'month-card' | 'continuation' | 'tile' | 'legend';
 
-export interface SheetPage {
-  readonly kind: PageKind;
+/** A laid-out page of paper of any kind. */
+export interface DrawnPage {
   /** A short name for lists of pages, e.g. `June` or `2-2`. */
   readonly name: string;
   readonly width: number;
   readonly height: number;
+  readonly primitives: readonly Primitive[];
+}
+
+/** A page of the peg board. */
+export interface SheetPage extends DrawnPage {
+  readonly kind: PageKind;
   /** 1 to 12 for a month's card and what continues it, else null. */
   readonly month: number | null;
   /** The part that is cut out and joined; null where the whole sheet is used. */
   readonly trim: Box | null;
-  readonly primitives: readonly Primitive[];
 }

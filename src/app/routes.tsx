@@ -27,6 +27,7 @@ export const personRoutes: readonly AppRoute[] = [
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.today, texts: ['today', 'sky'], load: () => import('./routes/today.js') },
+  { path: PATTERNS.look, texts: ['look', 'sky'], load: () => import('./routes/look.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
   { path: PATTERNS.moons, texts: ['moons', 'sky'], load: () => import('./routes/moons.js') },
   { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },

@@ -1,6 +1,7 @@
 /** Every address of the application, in one place. `pattern` is for the router, the rest for links. */
 export const PATTERNS = {
   today: '/',
+  look: '/look',
   signIn: '/sign-in',
   welcome: '/welcome',
   reset: '/reset',
@@ -52,6 +53,9 @@ interface FinderQuery {
 
 export const paths = {
   today: () => PATTERNS.today,
+  /** Where to look for a star; without a date on the next day that serves. */
+  look: (query: { marker: string; phenomenon?: string; date?: string; placeId?: string }) =>
+    withQuery(PATTERNS.look, query),
   signIn: (next?: string) => withQuery(PATTERNS.signIn, { next }),
   /** The code travels behind the hash: it never reaches a server's log. */
   welcome: (code?: string) =>

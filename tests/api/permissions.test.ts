@@ -148,6 +148,8 @@ function queryOf(endpoint: Endpoint, { publishedNumber }: Village): string {
     findMarkers: '?year=2027&from=06-10',
     readDrift: '?from=1500&to=2027',
     exportDriftCsv: '?from=1500&to=2027',
+    readLook: '?marker=pleiades&date=2027-06-10',
+    printLook: '?marker=pleiades&date=2027-06-10',
     compareVersions: `?from=${publishedNumber}&to=${publishedNumber}`,
   };
   return queries[endpoint.id] ?? '';

@@ -14,6 +14,8 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/sheet/units.ts': 'tests/unit/shared/sheet/page-paths.test.ts',
   'shared/sheet/version-figure.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
   'shared/sheet/watermark.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
+  'shared/sheet/watch-card-picture.ts': 'tests/unit/shared/sheet/watch-card.test.ts',
+  'shared/sheet/watch-card-scale.ts': 'tests/unit/shared/sheet/watch-card.test.ts',
   'shared/sheet/year-legend.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sheet/year-tiles.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sky/look/body-places.ts': 'tests/reference/against-ephem-bodies.test.ts',

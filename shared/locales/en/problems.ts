@@ -99,6 +99,7 @@ export const texts = {
     'too-many': 'These are too many at a time.',
     'moon-count': 'Give a whole number from 1 to 13.',
     'moon-month': 'Give a month from 1 to 12.',
+    'date-form': 'Write a day as year, month and day, such as 2027-06-07.',
     'marker-key': 'This is no marker. Choose one from the list of stars.',
     'sky-hour': 'An hour by the Sun lies between 0 and 23:45, in quarters of an hour.',
     'sky-minutes': 'Give whole minutes, from 15 to 240.',

@@ -159,6 +159,7 @@ export const texts = {
     goesDownAt: 'It goes down at {{time}}.',
     stopAt: 'Stop looking at <1>{{time}}</1>.',
     startAt: 'Start looking at <1>{{time}}</1>, not before.',
+    whereOnDay: 'Where to look that day',
     flatSame: 'On flat ground it would be the same day.',
     flatLater_one: 'On flat ground it would be about {{day}}: the hills make it {{count}} day later.',
     flatLater_other: 'On flat ground it would be about {{day}}: the hills make it {{count}} days later.',

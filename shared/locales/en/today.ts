@@ -36,6 +36,7 @@ export const texts = {
     startLabel: '{{time}} begin',
     hand: '1 hand',
     handHint: '1 hand: your fist at the end of your straight arm, about 10°.',
+    toLook: 'Where to look, with the times of each day',
     toStar: 'More about {{marker}}',
     none: 'No star comes or goes in the next days',
     leads: 'The calendar goes by it: {{titles}}.',

@@ -64,6 +64,7 @@ export interface MoonThen {
   vMag: number;
   /** Null where the star has no place in the sky to be measured from. */
   separationDeg: number | null;
+  /** `none` as well where there is no star to be outshone. */
   moonlight: Moonlight;
 }
 

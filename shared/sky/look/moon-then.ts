@@ -45,6 +45,6 @@ export function moonThen(site: Site, sky: SkyAt, star: HorizontalPlace | null): 
     isUp,
     vMag,
     separationDeg,
-    moonlight: moonlightOf(isUp, litShare, separationDeg ?? 180),
+    moonlight: separationDeg === null ? 'none' : moonlightOf(isUp, litShare, separationDeg),
   };
 }

@@ -44,7 +44,8 @@ export function watchWindowOf(
   const midnightJdUt = noonJdUt + intoNight * 0.5;
   const sinAltitude = (jdUt: number): number => Math.sin(sunAt(jdUt).altitudeRad);
 
-  if (limitJdUt === null && sinAltitude(midnightJdUt) > Math.sin(SUN_SHOWS_DEG * RAD_PER_DEG))
+  // Also where hills hide a Sun that is up all night: the sky is light and the Sun may stand behind the next tree.
+  if (sinAltitude(midnightJdUt) > Math.sin(SUN_SHOWS_DEG * RAD_PER_DEG))
     return { sunCourse: 'stays-up', limitJdUt: null, span: null };
 
   const lightEnd = limitJdUt ?? firstDepth(sinAltitude, noonJdUt, midnightJdUt, LIGHT_DEG);

@@ -3,7 +3,7 @@ import { paths } from '#src/lib/paths.js';
 /** The places of the rail, in their order. Another place is one line here, one icon and one word. */
 export const RAIL_PLACES = [
   { place: 'today', to: paths.today(), under: ['/'] },
-  { place: 'stars', to: paths.stars(), under: ['/stars', '/finder'] },
+  { place: 'stars', to: paths.stars(), under: ['/stars', '/finder', '/look'] },
   { place: 'calendar', to: paths.calendars(), under: ['/calendars'] },
   { place: 'village', to: paths.village(), under: ['/village', '/places'] },
 ] as const;

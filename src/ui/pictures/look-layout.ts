@@ -14,6 +14,9 @@ const LINE_PX = 24;
 /** Average width of a letter of the small type. */
 const LETTER_PX = 8.4;
 
+/** The words beside a path reach about this far: the ground under them must not reach into them. */
+const WORDS_PX = 190;
+
 export interface PathPoint {
   azimuthDeg: number;
   altitudeDeg: number;
@@ -30,7 +33,7 @@ export function lookView(
   height: number,
 ): (width: number) => SkylineView {
   const horizonDeg = horizonAltitude(points, middleDeg);
-  const topDeg = Math.max(horizonDeg + 1.7 * HAND_DEG, highestDeg + 2);
+  const topDeg = Math.max(horizonDeg + 1.7 * HAND_DEG, highestDeg + 4);
   const bottomDeg = horizonDeg - GROUND_DEG;
   return (width) => {
     const turnDeg = ((topDeg - bottomDeg) / height) * width;
@@ -60,13 +63,81 @@ export function labelTops(
   return tops;
 }
 
-/** The words stand to the right of the point, about this far: the ground under them must not reach into them. */
-const WORDS_PX = 190;
-
 function highestHorizon(points: readonly HorizonPoint[], azimuthDeg: number, scale: SkylineScale): number {
   const toAzimuthDeg = azimuthDeg + WORDS_PX / (scale.x(1) - scale.x(0));
   const corners = horizonWithin(points, { fromAzimuthDeg: azimuthDeg, toAzimuthDeg });
   return Math.max(...corners.map((corner) => corner.altitudeDeg));
+}
+
+/** The same direction, counted so that it lies within half a turn of another: a path may run through north. */
+export function besideAzimuth(azimuthDeg: number, middleDeg: number): number {
+  return middleDeg + ((((azimuthDeg - middleDeg + 180) % 360) + 360) % 360) - 180;
+}
+
+/** Where the words beside a path begin: to its right, or to its left where the picture ends too soon. */
+export function labelsLeft(path: readonly PathPoint[], scale: SkylineScale): number {
+  const across = path.map((point) => scale.x(point.azimuthDeg));
+  const right = Math.max(...across) + 26;
+  if (right + WORDS_PX <= scale.width || scale.width < 2 * WORDS_PX)
+    return Math.min(right, scale.width - 110);
+  return Math.max(0, Math.min(...across) - 26 - WORDS_PX);
+}
+
+/** A patch of the picture in pixels. */
+export interface Patch {
+  left: number;
+  top: number;
+  width: number;
+  height: number;
+}
+
+/** Room that a line of small type takes. */
+export function linePatch(words: string, left: number, top: number): Patch {
+  return { left, top: top + 3, width: words.length * LETTER_PX, height: LINE_PX - 6 };
+}
+
+export interface PlacedNeighbour {
+  x: number;
+  y: number;
+  /** On which side its name stands; null where there is no room for it. */
+  words: 'left' | 'right' | null;
+}
+
+/** Neighbours inside the picture and over the ground, each with its name beside it if nothing else stands there. */
+export function placeNeighbours(
+  neighbours: readonly (PathPoint & { words: string })[],
+  points: readonly HorizonPoint[],
+  scale: SkylineScale,
+  taken: readonly Patch[],
+): (PlacedNeighbour | null)[] {
+  const patches = [...taken];
+  return neighbours.map(({ azimuthDeg, altitudeDeg, words }) => {
+    const x = scale.x(azimuthDeg);
+    const y = scale.y(altitudeDeg);
+    const isInside =
+      x > 6 && x < scale.width - 6 && y > 6 && y < scale.y(horizonAltitude(points, azimuthDeg));
+    const glyph = { left: x - 8, top: y - 8, width: 16, height: 16 };
+    if (!isInside || patches.some((patch) => meets(patch, glyph))) return null;
+    patches.push(glyph);
+    const right = linePatch(words, x + 12, y - LINE_PX / 2);
+    const left = { ...right, left: x - 12 - right.width };
+    const isFree = (patch: Patch) =>
+      patch.left >= 0 &&
+      patch.left + patch.width <= scale.width &&
+      !patches.some((other) => meets(other, patch));
+    const side = isFree(right) ? 'right' : isFree(left) ? 'left' : null;
+    if (side !== null) patches.push(side === 'right' ? right : left);
+    return { x, y, words: side };
+  });
+}
+
+function meets(a: Patch, b: Patch): boolean {
+  return (
+    a.left < b.left + b.width &&
+    b.left < a.left + a.width &&
+    a.top < b.top + b.height &&
+    b.top < a.top + a.height
+  );
 }
 
 export interface CompassWord {
@@ -82,10 +153,12 @@ export function fittingCompass(
 ): (CompassWord & { x: number; left: number })[] {
   const placed: (CompassWord & { x: number; left: number; right: number })[] = [];
   const nearestFirst = [...compass].sort(
-    (a, b) => Math.abs(a.azimuthDeg - starAzimuthDeg) - Math.abs(b.azimuthDeg - starAzimuthDeg),
+    (a, b) =>
+      Math.abs(besideAzimuth(a.azimuthDeg, starAzimuthDeg) - starAzimuthDeg) -
+      Math.abs(besideAzimuth(b.azimuthDeg, starAzimuthDeg) - starAzimuthDeg),
   );
   for (const word of nearestFirst) {
-    const x = scale.x(word.azimuthDeg);
+    const x = scale.x(besideAzimuth(word.azimuthDeg, starAzimuthDeg));
     const width = word.words.length * LETTER_PX;
     if (x < 0 || x > scale.width || width > scale.width) continue;
     const left = Math.min(Math.max(0, x - width / 2), scale.width - width);

@@ -1,16 +1,26 @@
 import type { ReactNode } from 'react';
 import { classNames } from '../class-names.js';
 import {
+  besideAzimuth,
   fittingCompass,
   HAND_DEG,
+  labelsLeft,
   labelTops,
   lookView,
   type CompassWord,
   type PathPoint,
 } from './look-layout.js';
+import {
+  NeighbourGlyphs,
+  NeighbourNames,
+  STAR_SHAPE,
+  wholePath,
+  type LookNeighbour,
+} from './look-neighbours.js';
 import { horizonAltitude, SkylinePicture, type HorizonPoint, type SkylineScale } from './skyline.js';
 
 export type { CompassWord, PathPoint } from './look-layout.js';
+export type { LookNeighbour } from './look-neighbours.js';
 
 export interface LookLabel extends PathPoint {
   key: string;
@@ -20,14 +30,16 @@ export interface LookLabel extends PathPoint {
 export interface LookPictureProps {
   /** Skyline of the place. */
   points: readonly HorizonPoint[];
-  /** Where the star stands while it can be seen; drawn thick. In order of time. */
-  seenPath: readonly PathPoint[];
-  /** Where it still stands when it is too light, or not dark enough; drawn dotted. Joined to the other by you. */
-  lightPath: readonly PathPoint[];
+  /** Where the star stands while it can be seen; drawn thick. Each stretch in order of time. */
+  seenPaths: readonly (readonly PathPoint[])[];
+  /** Where it stands when it is too light or it is too low; drawn dotted. */
+  lightPaths: readonly (readonly PathPoint[])[];
   /** Where the star itself is drawn. */
   star: PathPoint;
   /** Where the path ends because the Sun comes: a bar across it. */
   stop?: PathPoint | undefined;
+  /** Bright stars, planets and the Moon around it; what has no room is left out of the picture. */
+  neighbours?: readonly LookNeighbour[] | undefined;
   /** Times and words beside the path: live text on top of the picture. */
   labels: readonly LookLabel[];
   /** Compass words along the foot. */
@@ -46,11 +58,11 @@ const ROD_X = 14;
 const ROD_WIDTH = 20;
 
 /** Where to look: the skyline of the place, the star's path above it, and a rod in half hands beside it. */
-export function LookPicture(props: LookPictureProps) {
+export function LookPicture(given: LookPictureProps) {
+  const props = aroundStar(given);
   const { points, star, compass, label, height = 210, light = true, className } = props;
   const middleDeg = star.azimuthDeg;
-  const path = [star, ...props.seenPath, ...props.lightPath];
-  const highestDeg = Math.max(...path.map((point) => point.altitudeDeg));
+  const highestDeg = Math.max(...wholePath(props).map((point) => point.altitudeDeg));
   return (
     <SkylinePicture
       className={classNames('look', className)}
@@ -65,6 +77,7 @@ export function LookPicture(props: LookPictureProps) {
       }
       inFront={(scale) => (
         <>
+          <NeighbourGlyphs {...props} scale={scale} />
           {fittingCompass(compass, middleDeg, scale).map(({ azimuthDeg, x }) => (
             <rect
               key={azimuthDeg}
@@ -84,16 +97,27 @@ export function LookPicture(props: LookPictureProps) {
   );
 }
 
+/** All directions counted from the star, so that nothing jumps where the path runs through north. */
+function aroundStar(props: LookPictureProps): LookPictureProps {
+  const beside = <T extends PathPoint>(point: T): T => ({
+    ...point,
+    azimuthDeg: besideAzimuth(point.azimuthDeg, props.star.azimuthDeg),
+  });
+  return {
+    ...props,
+    seenPaths: props.seenPaths.map((path) => path.map(beside)),
+    lightPaths: props.lightPaths.map((path) => path.map(beside)),
+    labels: props.labels.map(beside),
+    neighbours: props.neighbours?.map(beside),
+    stop: props.stop && beside(props.stop),
+  };
+}
+
 /** Everything that is said stands here as live text, so that it grows with the reader's letters. */
-function WordsOnTop({
-  points,
-  star,
-  labels,
-  compass,
-  handWords,
-  scale,
-}: LookPictureProps & { scale: SkylineScale }) {
+function WordsOnTop(props: LookPictureProps & { scale: SkylineScale }) {
+  const { points, star, labels, compass, handWords, scale } = props;
   const tops = labelTops(labels, points, scale);
+  const left = labelsLeft(wholePath(props), scale);
   return (
     <>
       <span
@@ -102,14 +126,12 @@ function WordsOnTop({
       >
         {handWords}
       </span>
-      {labels.map((each, index) => {
-        const left = Math.max(...labels.map((other) => scale.x(other.azimuthDeg))) + 26;
-        return (
-          <span key={each.key} className="on-picture" style={{ left, top: tops[index] }}>
-            {each.words}
-          </span>
-        );
-      })}
+      {labels.map((each, index) => (
+        <span key={each.key} className="on-picture" style={{ left, top: tops[index] }}>
+          {each.words}
+        </span>
+      ))}
+      <NeighbourNames {...props} />
       <div className="under-picture">
         {fittingCompass(compass, star.azimuthDeg, scale).map(({ azimuthDeg, words, left }) => (
           <span key={azimuthDeg} style={{ left }}>
@@ -186,7 +208,7 @@ function Rod({ scale, points }: { scale: SkylineScale; points: readonly HorizonP
   );
 }
 
-function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { scale: SkylineScale }) {
+function Paths({ seenPaths, lightPaths, star, stop, scale }: LookPictureProps & { scale: SkylineScale }) {
   const line = (path: readonly PathPoint[]) =>
     path
       .map((point) => `${scale.x(point.azimuthDeg).toFixed(1)} ${scale.y(point.altitudeDeg).toFixed(1)}`)
@@ -194,19 +216,27 @@ function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { 
   const at = { x: scale.x(star.azimuthDeg), y: scale.y(star.altitudeDeg) };
   return (
     <>
-      {lightPath.length > 1 && (
+      {lightPaths.map((path) => (
         <path
-          d={`M${line(lightPath)}`}
+          key={line(path)}
+          d={`M${line(path)}`}
           fill="none"
           stroke="var(--color-indigo)"
           strokeWidth={3.5}
           strokeDasharray="1 8"
           strokeLinecap="round"
         />
-      )}
-      {seenPath.length > 1 && (
-        <path d={`M${line(seenPath)}`} fill="none" stroke="var(--color-indigo)" strokeWidth={7} />
-      )}
+      ))}
+      {seenPaths.map((path) => (
+        <path
+          key={line(path)}
+          d={`M${line(path)}`}
+          fill="none"
+          stroke="var(--color-indigo)"
+          strokeWidth={7}
+          strokeLinejoin="round"
+        />
+      ))}
       {stop && (
         <rect
           x={scale.x(stop.azimuthDeg) - 16}
@@ -217,7 +247,7 @@ function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { 
         />
       )}
       <path
-        d={STAR}
+        d={STAR_SHAPE}
         transform={`translate(${String(at.x)} ${String(at.y)})`}
         fill="var(--color-indigo)"
         stroke="var(--color-chalk)"
@@ -227,7 +257,3 @@ function Paths({ seenPath, lightPath, star, stop, scale }: LookPictureProps & { 
     </>
   );
 }
-
-/** Four long rays, four short: the same star as the drawn sign. */
-const STAR =
-  'M0-13 2.6-4.2 9.2-9.2 4.2-2.6 13 0 4.2 2.6 9.2 9.2 2.6 4.2 0 13-2.6 4.2-9.2 9.2-4.2 2.6-13 0-4.2-2.6-9.2-9.2-2.6-4.2Z';

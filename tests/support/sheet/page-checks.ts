@@ -1,4 +1,4 @@
-import type { Box, Primitive, RingPrimitive, SheetPage, TextPrimitive } from '#shared/sheet/primitives.js';
+import type { Box, DrawnPage, Primitive, RingPrimitive, TextPrimitive } from '#shared/sheet/primitives.js';
 import { lineBoxes } from '#shared/sheet/text-layout.js';
 import { TYPE_FLOORS_PT } from '#shared/sheet/type-floors.js';
 
@@ -7,15 +7,15 @@ export const SAFE_MARGIN_MM = 7.5;
 /** Rounding of coordinates to a tenth of a micrometre, several of them added up. */
 const TOUCH_MM = 0.01;
 
-export function rings(pages: readonly SheetPage[]): RingPrimitive[] {
+export function rings(pages: readonly DrawnPage[]): RingPrimitive[] {
   return pages.flatMap((page) => page.primitives.filter((primitive) => primitive.type === 'ring'));
 }
 
-export function texts(pages: readonly SheetPage[]): TextPrimitive[] {
+export function texts(pages: readonly DrawnPage[]): TextPrimitive[] {
   return pages.flatMap((page) => page.primitives.filter((primitive) => primitive.type === 'text'));
 }
 
-export function allWords(pages: readonly SheetPage[]): string {
+export function allWords(pages: readonly DrawnPage[]): string {
   return texts(pages)
     .flatMap((text) => text.lines.map((line) => line.text))
     .join('\n');
@@ -65,7 +65,7 @@ export function overlap(a: Box, b: Box): boolean {
 }
 
 /** Sentences about everything that breaks a rule of the page; none on a good page. */
-export function faultsOf(page: SheetPage): string[] {
+export function faultsOf(page: DrawnPage): string[] {
   const faults: string[] = [];
   const words: { box: Box; text: string; owner: number }[] = [];
   page.primitives.forEach((primitive, index) => {

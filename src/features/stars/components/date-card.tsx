@@ -1,4 +1,6 @@
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
+import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR } from '#shared/contracts/calendars.js';
 import type { OccurrenceDetail } from '#shared/contracts/stars.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
 import { dayNumberOf, todayIn } from '#src/lib/days.js';
@@ -46,6 +48,19 @@ export function DateCard({
             today={dayNumberOf(todayIn(place.timeZone))}
           />
           <DayNotes star={star} occurrence={occurrence} phenomenon={phenomenon} dates={dates} />
+          {isInCalendarYears(star.year) && (
+            <Link
+              className="mt-1 inline-flex min-h-12 items-center"
+              to={paths.look({
+                marker: star.markerKey,
+                phenomenon,
+                date: occurrence.expected.gregorian,
+                placeId: place.id,
+              })}
+            >
+              {t('star.whereOnDay')}
+            </Link>
+          )}
         </div>
       ))}
       <p className="mt-2 text-small text-umber-soft">{t(`sky:trade.${phenomenon}`)}</p>
@@ -62,6 +77,11 @@ export function DateCard({
       )}
     </Board>
   );
+}
+
+/** People go out on days of these years; for others the four days are enough. */
+function isInCalendarYears(year: number): boolean {
+  return year >= CALENDAR_FIRST_YEAR && year <= CALENDAR_LAST_YEAR;
 }
 
 interface OneDayProps {

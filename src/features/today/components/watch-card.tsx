@@ -72,6 +72,17 @@ export function WatchCard({
       {leads.length > 0 && <p>{t('today:watch.leads', { titles: listWords(leads, i18n.language) })}</p>}
       <p className="mt-2 text-umber-soft text-small">{t('today:watch.night')}</p>
       <p className="mt-2">
+        <Link
+          to={paths.look({
+            marker: marker.markerKey,
+            phenomenon,
+            ...(place === null ? {} : { placeId: place.id }),
+          })}
+        >
+          {t('today:watch.toLook')}
+        </Link>
+      </p>
+      <p className="mt-2">
         <Link to={paths.star(marker.markerKey, { year: Number(expected.gregorian.slice(0, 4)) })}>
           {t('today:watch.toStar', { marker: name })}
         </Link>
@@ -118,8 +129,8 @@ function Picture({
       <LookPicture
         points={place.skyline}
         star={star}
-        seenPath={[]}
-        lightPath={path}
+        seenPaths={[]}
+        lightPaths={[path]}
         {...(side === 'dawn' && limit !== null ? { stop: limit } : {})}
         labels={labels}
         compass={Array.from({ length: 16 }, (_, index) => ({

@@ -1,5 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { fittingCompass, labelTops, lookView } from '#src/ui/pictures/look-layout.js';
+import {
+  besideAzimuth,
+  fittingCompass,
+  labelsLeft,
+  labelTops,
+  lookView,
+  placeNeighbours,
+} from '#src/ui/pictures/look-layout.js';
 import type { SkylineScale, SkylineView } from '#src/ui/pictures/skyline.js';
 
 const HEIGHT = 210;
@@ -56,5 +63,45 @@ describe('where to look', () => {
       );
     expect(at(256)).toEqual(['east-north-east']);
     expect(at(900).sort()).toEqual(['east', 'east-north-east', 'north-east']);
+  });
+});
+
+describe('neighbours', () => {
+  const scale = scaleOf(lookView(hills, 66, 14, HEIGHT)(600), 600);
+  const place = (
+    azimuthDeg: number,
+    altitudeDeg: number,
+    taken: { left: number; top: number; width: number; height: number }[] = [],
+  ) => placeNeighbours([{ azimuthDeg, altitudeDeg, words: 'Aldebaran' }], hills, scale, taken)[0];
+
+  it('are drawn over the ground and inside the picture only', () => {
+    expect(place(70, 12)).toMatchObject({ x: scale.x(70), y: scale.y(12), words: 'right' });
+    expect(place(70, 1)).toBeNull();
+    expect(place(200, 12)).toBeNull();
+  });
+
+  it('have their name where there is room: right, else left, else not at all', () => {
+    const x = scale.x(70);
+    const y = scale.y(12);
+    const right = { left: x + 12, top: y - 10, width: 80, height: 20 };
+    const left = { left: x - 100, top: y - 10, width: 80, height: 20 };
+    expect(place(70, 12, [right])?.words).toBe('left');
+    expect(place(70, 12, [right, left])?.words).toBeNull();
+    expect(place(70, 12, [{ left: x - 2, top: y - 2, width: 4, height: 4 }])).toBeNull();
+  });
+});
+
+describe('directions', () => {
+  it('are counted from the star, so that a path may run through north', () => {
+    expect(besideAzimuth(2, 358)).toBe(362);
+    expect(besideAzimuth(358, 2)).toBe(-2);
+    expect(besideAzimuth(90, 100)).toBe(90);
+  });
+
+  it('put words to the right of the whole path, or to its left where the picture ends', () => {
+    const scale = scaleOf(lookView([], 90, 14, HEIGHT)(600), 600);
+    const at = (azimuthDeg: number) => ({ azimuthDeg, altitudeDeg: 5 });
+    expect(labelsLeft([at(90), at(95)], scale)).toBeCloseTo(scale.x(95) + 26, 6);
+    expect(labelsLeft([at(90), at(118)], scale)).toBeLessThan(scale.x(90));
   });
 });

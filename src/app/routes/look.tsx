@@ -1,0 +1,1 @@
+export { LookPage as Component } from '#src/features/look/components/look-page.js';
