@@ -36,7 +36,7 @@ export function FinderAnswerView(props: FinderAnswerViewProps) {
   const good = answer.items.filter(({ caution }) => caution === null);
   const careful = answer.items.filter(({ caution }) => caution !== null);
   return (
-    <div className="grid min-w-0 gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       {old !== null && <OldMarkerBoard old={old} wanted={wanted} />}
       {facts !== null && (
         <FinderContext value={facts}>

@@ -19,7 +19,7 @@ export function FoundTable({ items }: { items: readonly FoundMarker[] }) {
   const [shown, setShown] = useState(STEP);
   const rest = Math.max(0, items.length - shown);
   return (
-    <div className="grid min-w-0 gap-3">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <div>
         <Button
           aria-expanded={isFull}
@@ -30,7 +30,11 @@ export function FoundTable({ items }: { items: readonly FoundMarker[] }) {
           {t(isFull ? 'fewerColumns' : 'moreColumns')}
         </Button>
       </div>
-      <Table caption={t('result.caption', { days: words.wanted(wanted) })} middle>
+      <Table
+        caption={t('result.caption', { days: words.wanted(wanted) })}
+        middle
+        className={isFull ? 'min-w-[80rem]' : undefined}
+      >
         <thead>
           <tr>
             <th scope="col">{t('column.sign')}</th>
