@@ -26,6 +26,8 @@ import { LettersService } from './features/letters/letters.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
+import { figuresRoutes } from './features/figures/figures.routes.js';
+import { FiguresService } from './features/figures/figures.service.js';
 import { healthRoutes } from './features/health/health.routes.js';
 import { HealthService } from './features/health/health.service.js';
 import { moonsRoutes } from './features/moons/moons.routes.js';
@@ -142,6 +144,7 @@ export function createApp(options: AppOptions): App {
   const skyYears = new SkyYearsService();
   const stars = new StarsService(places, skyYears);
   placesRoutes(mount, places);
+  figuresRoutes(mount, new FiguresService(dataSource, clock));
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));
   airRoutes(mount, new AirService(places, skyYears));

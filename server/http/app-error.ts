@@ -8,6 +8,8 @@ export interface AppErrorFacts {
   /** One entry per refused field. */
   errors?: readonly FieldError[];
   reason?: ProblemReason;
+  /** What stands in the way, by name. */
+  names?: readonly string[];
   /** With `stale`: what is stored now, and what was sent. */
   current?: unknown;
   sent?: unknown;
@@ -34,8 +36,8 @@ export function notFound(): AppError {
   return new AppError('not-found');
 }
 
-export function conflict(reason: ProblemReason): AppError {
-  return new AppError('conflict', { reason });
+export function conflict(reason: ProblemReason, names?: readonly string[]): AppError {
+  return new AppError('conflict', { reason, ...(names ? { names } : {}) });
 }
 
 /** A refusal of one field, for rules that no schema can know. */

@@ -23,7 +23,7 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
 
 function problemOf(error: AppError, requestId: unknown): Problem {
   const { title, status } = PROBLEM_TYPES[error.slug];
-  const { errors, reason, current, sent } = error.facts;
+  const { errors, reason, names, current, sent } = error.facts;
   return {
     type: problemTypeUri(error.slug),
     title,
@@ -32,6 +32,7 @@ function problemOf(error: AppError, requestId: unknown): Problem {
     ...(typeof requestId === 'string' ? { requestId } : {}),
     ...(errors ? { errors: [...errors] } : {}),
     ...(reason ? { reason } : {}),
+    ...(names ? { names: [...names] } : {}),
     ...(error.slug === 'stale' ? { current, sent } : {}),
   };
 }

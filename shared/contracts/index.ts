@@ -4,6 +4,7 @@ import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
 import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
+import { figuresEndpoints } from './figures.js';
 import { healthEndpoints } from './health.js';
 import { lookEndpoints } from './look.js';
 import { moonsEndpoints } from './moons.js';
@@ -31,6 +32,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   driftEndpoints,
   moonsEndpoints,
   airEndpoints,
+  figuresEndpoints,
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

@@ -43,6 +43,8 @@ export const problem = z.strictObject({
   errors: z.array(fieldError).optional(),
   /** A machine-readable reason within the type, e.g. `two-submissions`. */
   reason: z.string().optional(),
+  /** With `conflict`: what stands in the way, by name. */
+  names: z.array(z.string()).optional(),
   /** With `stale`: what the server holds now, and what was sent. */
   current: z.unknown().optional(),
   sent: z.unknown().optional(),

@@ -4,6 +4,7 @@ import {
   FIRST_YEAR,
   LAST_YEAR,
   NIGHT_STATES,
+  PATCH_CLASSES,
   PHENOMENA,
   PHENOMENON_OUTCOMES,
   SKY_NOTES,
@@ -19,7 +20,7 @@ import { place, placeInput, skyline } from './places.js';
 
 export const phenomenon = z.enum(PHENOMENA);
 
-/** `hr1165` for a star of the table, a word such as `pleiades` for a figure. */
+/** `hr1165` for a star of the table, a word such as `pleiades` for a figure, `f-` and an id for a village's own. */
 export const markerKey = z
   .string()
   .regex(/^(hr[1-9]\d{0,3}|[a-z][a-z0-9-]{1,39})$/u, 'marker-key')
@@ -55,12 +56,15 @@ export type PhenomenonDays = z.infer<typeof phenomenonDays>;
 
 export const markerNames = z.strictObject({
   markerKey,
-  kind: z.enum(['star', 'figure']),
+  /** `own-figure`: one of the village itself. */
+  kind: z.enum(['star', 'figure', 'own-figure']),
   /** Plain name; empty where a star has none. */
   name: z.string(),
-  /** Greek letter or Flamsteed number with the constellation, e.g. `α CMa`. */
+  /** Greek letter or Flamsteed number with the constellation, e.g. `α CMa`; empty for a patch of sky. */
   designation: z.string(),
-  hr: z.number().int(),
+  /** Null for a patch of sky. */
+  hr: z.number().int().nullable(),
+  /** Of the star that carries the dates; of a patch, that of a star which would need about as dark a sky. */
   vMag: z.number(),
 });
 export type MarkerNames = z.infer<typeof markerNames>;
@@ -219,6 +223,28 @@ export const starsEndpoints = {
   }),
 } as const;
 
+export const skyPatch = z.strictObject({
+  rightAscensionDeg: z.number(),
+  declinationDeg: z.number(),
+  patchClass: z.enum(PATCH_CLASSES),
+});
+
+/** A figure of the village as the engine needs it. */
+export const skyFigure = z.strictObject({
+  key: markerKey,
+  name: z.string(),
+  indicatorHr: z.number().int().nullable(),
+  memberHrs: z.array(z.number().int()),
+  patch: skyPatch.nullable(),
+  thresholdOverride: z
+    .strictObject({ sameSideDeg: z.number(), oppositeSideDeg: z.number(), source: z.string() })
+    .nullable(),
+});
+export type SkyFigure = z.infer<typeof skyFigure>;
+
 /** Place as the engine needs it; kept with a version so that its dates can be explained later. */
-export const placeSnapshot = place.omit({ id: true, communityId: true, version: true });
+export const placeSnapshot = place.omit({ id: true, communityId: true, version: true }).extend({
+  /** The village's own figures that the entries go by; absent where there are none. */
+  figures: z.array(skyFigure).optional(),
+});
 export type PlaceSnapshot = z.infer<typeof placeSnapshot>;

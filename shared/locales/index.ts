@@ -3,6 +3,7 @@ import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
 import { texts as drift } from './en/drift.js';
+import { texts as figures } from './en/figures.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
 import { texts as moons } from './en/moons.js';
@@ -37,6 +38,7 @@ export const en = {
   drift,
   moons,
   air,
+  figures,
   calendars,
   reviews,
   sheets,

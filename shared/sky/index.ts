@@ -26,6 +26,7 @@ import { prepareSkyline } from './horizon/skyline.js';
 import { lookAt } from './look/look-at.js';
 import { moonOverPlaceOf } from './look/moon-over-place.js';
 import type { Look } from './look/look-types.js';
+import { assertFigures } from './markers/figure-checks.js';
 import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
 import { DriftSolver, gregorianShiftDays as shiftDays } from './markers/marker-drift.js';
 import { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
@@ -54,6 +55,7 @@ import type {
   DepthAtCrossingCase,
   DepthAtCrossingYear,
   ExpectedDates,
+  Figure,
   MarkerDrift,
   MarkerKey,
   MarkerYear,
@@ -82,10 +84,11 @@ export { ELEVATION_M, SHIFT_DEG, SKYLINE_ALTITUDE_DEG, THRESHOLD_DEG } from './a
 export { FIGURES } from './markers/figures.js';
 export { markerKeyOf, type ResolvedMarker, resolveMarker } from './markers/marker-key.js';
 export type { PreparedYear } from './phenomena/prepared-year.js';
-export { findStar, STARS } from './stars/star-table.js';
+export { findStar, starPlaceJ2000, STARS } from './stars/star-table.js';
 export type { Calendar } from './time/julian-day.js';
 export { SkyRangeError } from './units/sky-range-error.js';
 export { CLARITY_SHIFT_DEG } from './visibility/clarity.js';
+export { PATCH_CLASS_FACTS, type PatchClassFacts } from './visibility/patch-classes.js';
 export {
   THRESHOLD_CONVENTION,
   THRESHOLD_SET_FACTS,
@@ -97,8 +100,8 @@ function shown(value: unknown): string {
   return typeof value === 'string' ? `"${value}"` : String(value);
 }
 
-function markerOf(markerKey: MarkerKey): ResolvedMarker {
-  const marker = resolveMarker(markerKey);
+function markerOf(markerKey: MarkerKey, figures: readonly Figure[]): ResolvedMarker {
+  const marker = resolveMarker(markerKey, figures);
   if (!marker) {
     throw new SkyRangeError(
       'markerKey',
@@ -125,14 +128,18 @@ export function prepareYear(year: number): PreparedYear {
   return prepare(year);
 }
 
-/** The year of one star or figure at a place: outcome, four phenomena with ranges, nights hidden, notes, basis. */
+/**
+ * The year of one star or figure at a place: outcome, four phenomena with ranges, nights hidden, notes, basis.
+ * @param figures a community's own figures; their keys stand beside the built-in ones
+ */
 export function computeMarkerYear(
   markerKey: MarkerKey,
   site: Site,
   settings: VisibilitySettings,
   year: number,
+  figures: readonly Figure[] = [],
 ): MarkerYear {
-  return computeSkyYear([markerKey], site, settings, year)[0] as MarkerYear;
+  return computeSkyYear([markerKey], site, settings, year, figures)[0] as MarkerYear;
 }
 
 /** The same for many markers; place and year are prepared once. Results in the order of the keys. */
@@ -141,11 +148,13 @@ export function computeSkyYear(
   site: Site,
   settings: VisibilitySettings,
   year: number,
+  figures: readonly Figure[] = [],
 ): MarkerYear[] {
   assertSite(site);
   assertSettings(settings);
   assertYear(year);
-  const markers = markerKeys.map(markerOf);
+  assertFigures(figures);
+  const markers = markerKeys.map((markerKey) => markerOf(markerKey, figures));
   const placeYear = placeYearOf(preparedYearOf(year), site, settings);
   return markers.map((marker) => markerYearOf(placeYear, marker));
 }
@@ -160,11 +169,13 @@ export function driftOf(
   site: Site,
   settings: VisibilitySettings,
   years: readonly number[],
+  figures: readonly Figure[] = [],
 ): MarkerDrift {
+  assertFigures(figures);
   assertSite(site);
   assertSettings(settings);
   assertYears(years);
-  return new DriftSolver(markerOf(markerKey), site, settings).solve(years);
+  return new DriftSolver(markerOf(markerKey, figures), site, settings).solve(years);
 }
 
 /** How many days later in the Gregorian year the second instant (JD UT) falls than the first, −183 to 183. */
@@ -202,14 +213,20 @@ export function depthAtCrossingYear(question: DepthAtCrossingCase): DepthAtCross
 /**
  * What the marker does on each night of the civil year, as runs of nights in one state. A night runs from noon to noon
  * and carries the day number of its evening: the first morning seen on day N belongs to the night N − 1.
- * @param markerYear a result of computeMarkerYear for the same site and settings
+ * @param markerYear a result of computeMarkerYear for the same site, settings and figures
  */
-export function yearStrip(markerYear: MarkerYear, site: Site, settings: VisibilitySettings): StripSegment[] {
+export function yearStrip(
+  markerYear: MarkerYear,
+  site: Site,
+  settings: VisibilitySettings,
+  figures: readonly Figure[] = [],
+): StripSegment[] {
   assertSite(site);
   assertSettings(settings);
   assertYear(markerYear.year);
+  assertFigures(figures);
   const placeYear = placeYearOf(preparedYearOf(markerYear.year), site, settings);
-  return yearStripOf(markerAtPlace(placeYear, markerOf(markerYear.markerKey)));
+  return yearStripOf(markerAtPlace(placeYear, markerOf(markerYear.markerKey, figures)));
 }
 
 /**
@@ -247,12 +264,14 @@ export function computeAirYear(
   site: Site,
   settings: VisibilitySettings,
   year: number,
+  figures: readonly Figure[] = [],
 ): AirYear {
+  assertFigures(figures);
   assertSite(site);
   assertSettings(settings);
   assertYear(year);
   return airYearOf(
-    markerAtPlace(placeYearOf(preparedYearOf(year), site, settings), markerOf(markerKey)),
+    markerAtPlace(placeYearOf(preparedYearOf(year), site, settings), markerOf(markerKey, figures)),
     site,
   );
 }
@@ -295,12 +314,14 @@ export function whereToLook(
   settings: VisibilitySettings,
   dayNumber: number,
   side: WatchSide,
+  figures: readonly Figure[] = [],
 ): Look {
+  assertFigures(figures);
   assertSite(site);
   assertSettings(settings);
   assertOneOf('side', side, WATCH_SIDES);
   const placeYear = placeYearOf(preparedYearOf(civilYearOfDay(dayNumber)), site, settings);
-  return lookAt(markerAtPlace(placeYear, markerOf(markerKey)), site, dayNumber, side);
+  return lookAt(markerAtPlace(placeYear, markerOf(markerKey, figures)), site, dayNumber, side);
 }
 
 /** Altitude of a skyline in a direction; points are joined by straight lines, 0° and 360° are one point. */

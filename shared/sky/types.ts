@@ -1,6 +1,7 @@
 import type {
   Clarity,
   NightState,
+  PatchClass,
   Phenomenon,
   PhenomenonOutcome,
   SkylineRule,
@@ -48,14 +49,25 @@ export interface Star {
   vMag: number;
 }
 
-/** A group of stars that is watched as one; dates are those of its indicator star. */
+/** A part of the sky that no star stands for: a piece of the Milky Way, a dark cloud, a faint cluster. */
+export interface SkyPatch {
+  /** Equator and equinox of J2000; right ascension 0…360°, declination −90…90°. It has no motion of its own. */
+  rightAscensionDeg: number;
+  declinationDeg: number;
+  patchClass: PatchClass;
+}
+
+/** A group of stars, or a patch of sky, that is watched as one: built in, or a community's own. */
 export interface Figure {
   key: string;
   name: string;
-  indicatorHr: number;
+  /** The star whose dates are the figure's; null for a patch. */
+  indicatorHr: number | null;
   memberHrs: readonly number[];
-  /** Depths to use instead of those of the indicator's magnitude; null keeps the rule of the place. */
-  thresholdOverride: { sameSideDeg: number; oppositeSideDeg: number } | null;
+  /** Where the dates come from when there is no indicator star; otherwise null. */
+  patch: SkyPatch | null;
+  /** Depths to use instead of those of the indicator's magnitude or the patch's class; null keeps those. */
+  thresholdOverride: { sameSideDeg: number; oppositeSideDeg: number; source: string } | null;
 }
 
 /** `hr<number>` for a star, the figure's key for a figure. */

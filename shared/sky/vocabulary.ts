@@ -37,6 +37,10 @@ export type ThresholdSetId = (typeof THRESHOLD_SETS)[number];
 export const SKYLINE_RULES = ['depth-at-crossing', 'altitude-difference'] as const;
 export type SkylineRule = (typeof SKYLINE_RULES)[number];
 
+/** How bright a patch of sky without a star of its own is taken to be; see visibility/patch-classes.ts. */
+export const PATCH_CLASSES = ['third-magnitude', 'faint', 'full-night'] as const;
+export type PatchClass = (typeof PATCH_CLASSES)[number];
+
 /** How clear the air usually is in a month. */
 export const CLARITIES = ['clear', 'ordinary', 'hazy'] as const;
 export type Clarity = (typeof CLARITIES)[number];

@@ -42,6 +42,14 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['people', 'places'],
     load: () => import('./routes/village-places.js'),
   },
+  {
+    path: PATTERNS.villageFigures,
+    texts: ['people', 'figures'],
+    load: () => import('./routes/village-figures.js'),
+  },
+  { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
+  { path: PATTERNS.figure, texts: ['figures', 'stars', 'sky'], load: () => import('./routes/figure.js') },
+  { path: PATTERNS.changeFigure, texts: ['figures'], load: () => import('./routes/figure-change.js') },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
   {
     path: PATTERNS.villageAsking,

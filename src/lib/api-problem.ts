@@ -9,6 +9,8 @@ interface ProblemFacts {
   detail: string;
   errors?: readonly FieldError[];
   reason?: string | undefined;
+  /** What stands in the way, by name. */
+  names?: readonly string[] | undefined;
   requestId?: string | undefined;
   current?: unknown;
   sent?: unknown;
@@ -22,6 +24,7 @@ export class ApiProblem extends Error {
   readonly status: number;
   readonly errors: readonly FieldError[];
   readonly reason: string | undefined;
+  readonly names: readonly string[];
   readonly requestId: string | undefined;
   /** With `stale`: what the server holds now, and what was sent. */
   readonly current: unknown;
@@ -35,6 +38,7 @@ export class ApiProblem extends Error {
     this.status = facts.status;
     this.errors = facts.errors ?? [];
     this.reason = facts.reason;
+    this.names = facts.names ?? [];
     this.requestId = facts.requestId;
     this.current = facts.current;
     this.sent = facts.sent;
@@ -55,13 +59,14 @@ export async function readProblem(response: Response): Promise<ApiProblem> {
       retryAfterS,
     });
   }
-  const { type, status, detail, errors, reason, requestId, current, sent } = parsed.data;
+  const { type, status, detail, errors, reason, names, requestId, current, sent } = parsed.data;
   return new ApiProblem({
     slug: slugOf(type),
     status,
     detail,
     errors: errors ?? [],
     reason,
+    names,
     requestId,
     current,
     sent,

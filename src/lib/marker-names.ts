@@ -6,5 +6,5 @@ export type NamesByKey = ReadonlyMap<string, Pick<MarkerNames, 'name' | 'designa
 /** How a star or figure is called on screens: its name, else its letter in the constellation, else its number. */
 export function markerName(names: Pick<MarkerNames, 'name' | 'designation' | 'hr'>): string {
   if (names.name !== '') return names.name;
-  return names.designation === '' ? `HR ${names.hr}` : names.designation;
+  return names.designation === '' ? `HR ${String(names.hr ?? '')}` : names.designation;
 }

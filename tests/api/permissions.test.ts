@@ -16,6 +16,7 @@ import {
   says,
   submit,
 } from '#tests/support/calendar-api.js';
+import { addFigure, figureInput } from '#tests/support/figure-api.js';
 import { PERMISSION_GUIDE, withPermissionTable } from '../../docker-free-scripts/lib/permission-table.js';
 
 /**
@@ -31,6 +32,7 @@ interface Village {
   calendarId: string;
   entryId: string;
   personId: string;
+  figureId: string;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
   publishedNumber: number;
@@ -132,6 +134,7 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     calendarId: village.calendarId,
     entryId: village.entryId,
     personId: village.personId,
+    figureId: village.figureId,
     markerKey: 'pleiades',
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
@@ -189,6 +192,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     updatePerson: () => ({ roles: ['observer'], ...stale }),
     createPlace: () => place,
     updatePlace: () => ({ ...place, ...stale }),
+    createFigure: () => figureInput(),
+    updateFigure: () => ({ ...figureInput(), ...stale }),
     previewSkylineEffects: () => ({ place, year: 2027 }),
     compareMarkerYears: () => ({
       years: [2027],
@@ -227,6 +232,7 @@ async function furnishOwn(): Promise<Village> {
     calendarId: calendar.id,
     entryId: entry.id,
     personId: added.person.id,
+    figureId: (await addFigure(village.officer)).id,
     elderId: village.elder.personId,
     publishedNumber: published.number,
     reviewedNumber: reviewed.number,
@@ -245,6 +251,7 @@ async function furnishOther(): Promise<Village> {
     calendarId: calendar.id,
     entryId: entry.id,
     personId: officer.personId,
+    figureId: (await addFigure(officer)).id,
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,

@@ -57,7 +57,7 @@ describe('POST /api/session', () => {
   it.each([
     ['a wrong password', { ...officer, password: 'limewash-and-peg' }],
     ['an unknown address', { ...officer, email: 'nobody@dawnpeg.example' }],
-    ['a person without a password yet', { ...officer, email: 'steward-b@dawnpeg.example' }],
+    ['a person without a password yet', { ...officer, email: 'elder-b3@dawnpeg.example' }],
   ])('answers the same 401 for %s', async (_what, input) => {
     const answer = await (await api.visitor()).post('/api/session', input);
     expect(answer.status).toBe(401);

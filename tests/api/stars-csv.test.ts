@@ -2,7 +2,7 @@ import { parse } from 'csv-parse/sync';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Place } from '#shared/contracts/places.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
-import { STARS } from '#shared/sky/index.js';
+import { FIGURES, STARS } from '#shared/sky/index.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { addPlaceLike, firstPlace } from '#tests/support/place-api.js';
 
@@ -27,9 +27,9 @@ describe('the star table as CSV', () => {
     const { text, headers } = await download();
     expect(headers['content-type']).toBe('text/csv; charset=utf-8');
     expect(text.startsWith('\ufeffkind,name,designation,HR number,magnitude V,')).toBe(true);
-    expect(text.split('\r\n').length).toBe(STARS.length + 2 + 1 + 1);
+    expect(text.split('\r\n').length).toBe(STARS.length + FIGURES.length + 1 + 1);
     const lines = read(text);
-    expect(lines.length).toBe(STARS.length + 2);
+    expect(lines.length).toBe(STARS.length + FIGURES.length);
     expect(new Set(lines.map((line) => Object.keys(line).length)).size).toBe(1);
   });
 

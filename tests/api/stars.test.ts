@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Place } from '#shared/contracts/places.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import type { MarkerDetail, MarkerRow } from '#shared/contracts/stars.js';
-import { computeMarkerYear, PHENOMENA, STARS, watchTimes, yearStrip } from '#shared/sky/index.js';
+import { computeMarkerYear, FIGURES, PHENOMENA, STARS, watchTimes, yearStrip } from '#shared/sky/index.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { addPlaceLike, firstPlace } from '#tests/support/place-api.js';
 
@@ -41,11 +41,10 @@ const iso = ({ year, month, day }: { year: number; month: number; day: number })
 describe('the star table', () => {
   it('holds every star and figure once, figures first', async () => {
     const { items } = await table();
-    expect(items.length).toBe(STARS.length + 2);
+    expect(items.length).toBe(STARS.length + FIGURES.length);
     expect(new Set(items.map((row) => row.markerKey)).size).toBe(items.length);
-    expect(items.slice(0, 3).map((row) => [row.kind, row.name])).toEqual([
-      ['figure', 'Pleiades'],
-      ['figure', 'Belt of Orion'],
+    expect(items.slice(0, FIGURES.length + 1).map((row) => [row.kind, row.name])).toEqual([
+      ...FIGURES.map(({ name }) => ['figure', name]),
       ['star', 'Alpheratz'],
     ]);
   });
@@ -238,13 +237,8 @@ describe('one star', () => {
     const polaris = await star('hr424', 2027, path);
     expect(polaris).toMatchObject({ outcome: 'never-sets', nightsHidden: null });
     expect(Object.values(polaris.details).flat()).toEqual([]);
-    expect(polaris.strip).toEqual([
-      {
-        state: 'all-night',
-        fromDayNumber: polaris.firstDayNumber,
-        toDayNumber: polaris.lastDayNumber,
-      },
-    ]);
+    // Around midsummer no night at 66° N is dark enough, even for a star that is up.
+    expect(polaris.strip.map(({ state }) => state)).toEqual(['all-night', 'hidden', 'all-night']);
   });
 });
 

@@ -27,7 +27,7 @@ describe('ERFA: where a star stands over a place', () => {
     const { latitudeDeg, longitudeDeg } = expected;
     const marker = markerAt(`hr${expected.hr}`, siteAt(latitudeDeg, longitudeDeg), year);
     const star = skyAt(marker.year, marker.ground, expected.jdUt).starAt(
-      marker.year.stars.placeOf(marker.starIndex),
+      marker.year.stars.placeOf(marker.marker.starRef),
     );
     const apart = separationRad(star, {
       altitudeRad: expected.altitudeDeg * DEG,

@@ -5,6 +5,7 @@ import { CalendarEntity } from './calendar.entity.js';
 import { CommunityEntity } from './community.entity.js';
 import { DraftContributionEntity } from './draft-contribution.entity.js';
 import { EntryEntity } from './entry.entity.js';
+import { FigureEntity } from './figure.entity.js';
 import { LetterChoiceEntity } from './letter-choice.entity.js';
 import { LetterEntity } from './letter.entity.js';
 import { MembershipEntity } from './membership.entity.js';
@@ -23,6 +24,7 @@ export const ENTITIES = [
   CommunityEntity,
   MembershipEntity,
   PlaceEntity,
+  FigureEntity,
   CalendarEntity,
   EntryEntity,
   DraftContributionEntity,

@@ -16,11 +16,11 @@ export class AirService {
   ) {}
 
   async read(actor: Actor, placeId: string, markerKey: string, year: number): Promise<AirAnswer> {
-    const place = await this.places.read(actor, placeId);
-    if (resolveMarker(markerKey) === null) throw notFound();
+    const place = await this.places.watched(actor, placeId);
+    if (resolveMarker(markerKey, place.figures) === null) throw notFound();
     const [markerYear] = this.skyYears.markerYears(place, year, [markerKey]);
     if (!markerYear) throw notFound();
-    const airYear = computeAirYear(markerKey, siteOf(place), settingsOf(place), year);
-    return toAirAnswer(placeId, markerNamesOf(markerKey), airYear, markerYear.basis);
+    const airYear = computeAirYear(markerKey, siteOf(place), settingsOf(place), year, place.figures);
+    return toAirAnswer(placeId, markerNamesOf(markerKey, place.figures), airYear, markerYear.basis);
   }
 }

@@ -4,6 +4,7 @@ import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { personNames } from '../people/person-names.service.js';
 
@@ -32,6 +33,13 @@ const NAMES: Readonly<
     new Map((await manager.findBy(CommunityEntity, { id: In(ids) })).map(({ id, name }) => [id, name])),
   place: async (manager, ids) =>
     new Map((await manager.findBy(PlaceEntity, { id: In(ids) })).map(({ id, name }) => [id, name])),
+  figure: async (manager, ids) =>
+    new Map(
+      (await manager.findBy(FigureEntity, { id: In(ids) })).map(({ id, names }) => [
+        id,
+        names[0]?.name ?? '',
+      ]),
+    ),
   entry: async (manager, ids) =>
     new Map(
       (await manager.findBy(EntryEntity, { id: In(ids) })).map(({ id, content }) => [

@@ -6,6 +6,7 @@ import { DraftContributionEntity } from '../../db/entities/draft-contribution.en
 import type { EntryEntity } from '../../db/entities/entry.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { AppError, notFound } from '../../http/app-error.js';
+import { everyVillageFigure } from '../figures/village-figures.service.js';
 import { toPlaceSnapshot } from './calendars.mapper.js';
 import { liveEntries } from './calendars.repository.js';
 import type { SkyDatesService } from './sky-dates.service.js';
@@ -17,6 +18,7 @@ export interface DraftEntry {
 }
 
 export interface Draft {
+  /** With every figure of the village, also those that were taken out. */
   place: PlaceSnapshot;
   entries: DraftEntry[];
 }
@@ -72,7 +74,10 @@ export async function readDraft(
   sky: SkyDatesService,
   calendar: CalendarEntity,
 ): Promise<Draft> {
-  const place = toPlaceSnapshot(await manager.findOneByOrFail(PlaceEntity, { id: calendar.placeId }));
+  const place = {
+    ...toPlaceSnapshot(await manager.findOneByOrFail(PlaceEntity, { id: calendar.placeId })),
+    figures: await everyVillageFigure(manager, calendar.communityId),
+  };
   const rows = await liveEntries(manager, calendar.id);
   const dates = sky.datesOf(
     place,

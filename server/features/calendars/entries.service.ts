@@ -12,6 +12,7 @@ import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { villageFigures } from '../figures/village-figures.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
@@ -32,8 +33,8 @@ export class EntriesService {
   }
 
   async add(actor: Actor, calendarId: string, content: EntryInput): Promise<Entry> {
-    expectKnownMarker(content, 'lead');
     return this.change(calendarId, async (manager, calendar) => {
+      await expectKnownMarker(manager, calendar, content, 'lead');
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
       await writeOrder(manager, [...entries.map((entry) => entry.id), id]);
@@ -44,11 +45,13 @@ export class EntriesService {
 
   /** Saving what is stored already changes nothing: no new version, and nobody becomes a writer by it. */
   async update(actor: Actor, calendarId: string, entryId: string, input: EntryUpdate): Promise<Entry> {
-    expectKnownMarker(input.content, 'content.lead');
     return this.change(calendarId, async (manager, calendar) => {
       const row = await liveEntry(manager, calendarId, entryId);
       if (row.version !== input.version) throw stale(await this.one(manager, calendar, entryId), input);
       const fields = changedFields(row.content, input.content);
+      if (fields.includes('lead')) {
+        await expectKnownMarker(manager, calendar, input.content, 'content.lead');
+      }
       if (fields.length > 0) {
         await manager.update(
           EntryEntity,
@@ -201,10 +204,21 @@ async function liveEntry(manager: EntityManager, calendarId: string, entryId: st
   return row;
 }
 
-/** @param field where the lead stands in the request */
-function expectKnownMarker({ lead }: EntryInput, field: string): void {
+/**
+ * A figure that was taken out serves no new entry; one that goes by it already may be written on. The Sun's and the
+ * sky's signs go by stars and built-in figures only.
+ * @param field where the lead stands in the request
+ */
+async function expectKnownMarker(
+  manager: EntityManager,
+  { communityId }: CalendarEntity,
+  { lead }: EntryInput,
+  field: string,
+): Promise<void> {
   const markerKey = markerKeyOfLead(lead);
-  if (markerKey === null || knowsMarker(markerKey)) return;
+  if (markerKey === null) return;
+  const figures = lead.type === 'marker' ? await villageFigures(manager, communityId) : [];
+  if (knowsMarker(markerKey, figures)) return;
   throw invalidField(
     lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
     'unknown-marker',

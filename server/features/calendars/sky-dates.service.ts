@@ -1,8 +1,9 @@
 import { entryDatesOf } from '#shared/calendar/entry-dates.js';
 import type { EntryDates, EntryInput, EntryLead } from '#shared/contracts/calendars.js';
+import type { SkyFigure } from '#shared/contracts/stars.js';
 import type { FrozenMarker } from '#shared/contracts/versions.js';
 import { resolveMarker } from '#shared/sky/index.js';
-import type { WatchedPlace } from '../places/watched-place.service.js';
+import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { SkyMarkerYearsService } from '../sky-markers/sky-marker-years.service.js';
 import { SkyYearsService } from '../stars/sky-years.service.js';
@@ -34,15 +35,23 @@ export class SkyDatesService {
   /** The stars and figures that entries go by, each once and in the order of the keys, with names and the year's strip. */
   frozenMarkers(place: WatchedPlace, year: number, contents: readonly EntryInput[]): FrozenMarker[] {
     return markerKeysOf(contents).map((key) => ({
-      ...markerNamesOf(key),
+      ...markerNamesOf(key, figuresOf(place)),
       strip: this.years.nights(place, year, key).strip,
     }));
   }
 }
 
-/** Is it a star of the table or a figure? */
-export function knowsMarker(markerKey: string): boolean {
-  return resolveMarker(markerKey) !== null;
+/** The place with only those figures of the village that entries go by; without any, it stands as it always stood. */
+export function withUsedFigures<P extends WatchedPlace>(place: P, contents: readonly EntryInput[]): P {
+  const keys = new Set(markerKeysOf(contents));
+  const { figures = [], ...rest } = place;
+  const used = figures.filter(({ key }) => keys.has(key));
+  return (used.length === 0 ? rest : { ...rest, figures: used }) as P;
+}
+
+/** Is it a star of the table, a built-in figure or one of the village's own? */
+export function knowsMarker(markerKey: string, figures: readonly SkyFigure[]): boolean {
+  return resolveMarker(markerKey, figures) !== null;
 }
 
 /** The star or figure that a lead names, for whatever it goes by it; null where none is named. */

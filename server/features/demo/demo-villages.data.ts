@@ -1,4 +1,5 @@
 import type { CommunityInput, Role } from '#shared/contracts/people.js';
+import type { FigureInput } from '#shared/contracts/figures.js';
 import type { PlaceInput } from '#shared/contracts/places.js';
 
 /**
@@ -19,6 +20,8 @@ export interface DemoVillage {
   rule: { minElders: number; mustSign: string[]; oneOf: string[]; steward: boolean };
   people: DemoPerson[];
   place: PlaceInput;
+  /** Written down by the first officer. */
+  figures: FigureInput[];
 }
 
 /** Known to everybody: such accounts exist in demo databases only, and those listen on loopback only. */
@@ -80,6 +83,7 @@ export const UPPER_TAZIMEL: DemoVillage = {
     oppositeSideShiftDeg: 0,
     skylineRule: 'altitude-difference',
   },
+  figures: [],
 };
 
 export const VARDESCA_TERRACES: DemoVillage = {
@@ -94,9 +98,9 @@ export const VARDESCA_TERRACES: DemoVillage = {
   rule: { minElders: 2, mustSign: ['elder-b2'], oneOf: [], steward: true },
   people: [
     { mailbox: 'officer2', displayName: 'Lume', roles: ['officer'], account: true },
-    { mailbox: 'steward-b', displayName: 'Osca', roles: ['steward'], account: false },
-    { mailbox: 'elder-b1', displayName: 'Elder B-1', roles: ['elder'], account: false },
-    { mailbox: 'elder-b2', displayName: 'Elder B-2', roles: ['elder'], account: false },
+    { mailbox: 'steward2', displayName: 'Osca', roles: ['steward'], account: true },
+    { mailbox: 'elder-b1', displayName: 'Elder B-1', roles: ['elder'], account: true },
+    { mailbox: 'elder-b2', displayName: 'Elder B-2', roles: ['elder'], account: true },
     { mailbox: 'elder-b3', displayName: 'Elder B-3', roles: ['elder'], account: false },
   ],
   place: {
@@ -125,4 +129,116 @@ export const VARDESCA_TERRACES: DemoVillage = {
     oppositeSideShiftDeg: 0,
     skylineRule: 'altitude-difference',
   },
+  figures: [
+    {
+      names: [
+        { tag: 'art-x-vardesca', name: 'Vàrdek' },
+        { tag: 'en', name: 'The four steps' },
+      ],
+      story:
+        'Four steps stand in the wall of the night. Whoever sees the lowest step before the morning light looks to the clods: wet ones wait, dry ones break.',
+      variants: [
+        {
+          toldBy: 'Elder B-3',
+          text: 'The lowest step is cold. Only the day that is as long as its night warms it.',
+        },
+      ],
+      memberHrs: [4656, 4730, 4763, 4853],
+      indicatorHr: 4730,
+      patch: null,
+      ownDepths: null,
+      sharingLevel: 'open',
+    },
+    {
+      names: [
+        { tag: 'art-x-vardesca', name: 'Tilɵ̄' },
+        { tag: 'en', name: 'The dark sack' },
+      ],
+      story:
+        'Beside the steps lies a sack of which nobody has seen the bottom. On clear nights it is emptiest.',
+      variants: [],
+      memberHrs: [],
+      indicatorHr: null,
+      // Beside the Southern Cross; the place is rounded, the dark has no middle.
+      patch: { rightAscensionDeg: 192, declinationDeg: -62.5, patchClass: 'full-night' },
+      ownDepths: null,
+      sharingLevel: 'village',
+    },
+  ],
+};
+
+export const THOLMERE_LANDING: DemoVillage = {
+  settings: {
+    name: 'Tholmere Landing',
+    villageLanguage: { tag: 'art-x-tholmere', name: 'Tholmer' },
+    officerLanguage: { tag: 'en', name: 'English' },
+    yearStart: { date: { month: 8, day: 1 }, note: 'The first dark evening after the light nights' },
+    weatherContact: 'Coast weather service, call 920',
+    agricultureContact: 'Northern agricultural office, call 921',
+  },
+  rule: { minElders: 2, mustSign: [], oneOf: [], steward: true },
+  people: [
+    { mailbox: 'officer3', displayName: 'Ranve', roles: ['officer'], account: true },
+    { mailbox: 'steward3', displayName: 'Orsel', roles: ['steward'], account: true },
+    { mailbox: 'elder-c1', displayName: 'Elder C-1', roles: ['elder'], account: true },
+    { mailbox: 'elder-c2', displayName: 'Elder C-2', roles: ['elder'], account: true },
+    { mailbox: 'elder-c3', displayName: 'Elder C-3', roles: ['elder'], account: true },
+  ],
+  place: {
+    name: 'Landing stage',
+    latitudeDeg: 66,
+    longitudeDeg: 23,
+    elevationM: 15,
+    timeZone: 'Europe/Stockholm',
+    skyline: skyline('0:3 45:3 90:3 135:2.5 180:2 205:1 225:0 270:0.5 315:2 360:3'),
+    clarityByMonth: [
+      'ordinary',
+      'clear',
+      'clear',
+      'clear',
+      'ordinary',
+      'ordinary',
+      'ordinary',
+      'ordinary',
+      'ordinary',
+      'hazy',
+      'hazy',
+      'hazy',
+    ],
+    thresholdSet: 'three-class',
+    sameSideShiftDeg: 0,
+    oppositeSideShiftDeg: 0,
+    skylineRule: 'altitude-difference',
+  },
+  figures: [
+    {
+      names: [
+        { tag: 'art-x-tholmere', name: 'Ranvǭ' },
+        { tag: 'en', name: 'The long sledge' },
+      ],
+      story:
+        'The sledge never leaves the sky. In the dark months it drives once around the pole each night, and its runner shows the hour.',
+      variants: [],
+      memberHrs: [4295, 4301, 4554, 4660, 4905, 5054, 5191],
+      indicatorHr: 5191,
+      patch: null,
+      ownDepths: null,
+      sharingLevel: 'open',
+    },
+    {
+      names: [
+        { tag: 'art-x-tholmere', name: 'Mësk' },
+        { tag: 'en', name: 'Three in a row' },
+      ],
+      story: 'Three boats come in over the ice. When they stand in the south at nine, the winter has turned.',
+      variants: [
+        { toldBy: 'Elder C-1', text: 'Three men carry the net. The one in the middle calls the stroke.' },
+      ],
+      memberHrs: [1852, 1903, 1948],
+      indicatorHr: 1903,
+      patch: null,
+      ownDepths: null,
+      sharingLevel: 'village',
+    },
+  ],
 };

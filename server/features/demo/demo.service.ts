@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
+import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PersonEntity } from '../../db/entities/person.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
@@ -11,6 +12,7 @@ import { seedDemoCalendar } from './demo-calendar.service.js';
 import {
   DEMO_DOMAIN,
   DEMO_PASSWORD,
+  THOLMERE_LANDING,
   UPPER_TAZIMEL,
   VARDESCA_TERRACES,
   type DemoVillage,
@@ -22,12 +24,12 @@ export async function seedDemo(dataSource: DataSource, clock: Clock): Promise<vo
   await seedDemoCalendar(dataSource, clock);
 }
 
-/** People, settings and places only. */
+/** People, settings, places and figures only. */
 export async function seedDemoVillages(dataSource: DataSource, clock: Clock): Promise<void> {
   if ((await dataSource.getRepository(PersonEntity).count()) > 0) return;
   const passwordHash = await hashPassword(DEMO_PASSWORD);
   await inTransaction(dataSource, async (manager) => {
-    for (const village of [UPPER_TAZIMEL, VARDESCA_TERRACES]) {
+    for (const village of [UPPER_TAZIMEL, VARDESCA_TERRACES, THOLMERE_LANDING]) {
       await foundVillage(manager, village, passwordHash, clock.now());
     }
   });
@@ -40,7 +42,7 @@ export async function holdsDemoAccounts(dataSource: DataSource): Promise<boolean
 
 async function foundVillage(
   manager: EntityManager,
-  { settings, rule, people, place }: DemoVillage,
+  { settings, rule, people, place, figures }: DemoVillage,
   passwordHash: string,
   createdAt: Date,
 ): Promise<void> {
@@ -76,4 +78,17 @@ async function foundVillage(
     await manager.insert(MembershipEntity, { id: randomUUID(), personId, communityId, roles });
   }
   await manager.insert(PlaceEntity, { id: randomUUID(), communityId, ...place, createdAt });
+  const officer = people.find(({ roles }) => roles.includes('officer'));
+  const updatedBy = officer && ids.get(officer.mailbox);
+  if (updatedBy === undefined) return;
+  for (const figure of figures) {
+    await manager.insert(FigureEntity, {
+      id: randomUUID(),
+      communityId,
+      ...figure,
+      takenOutAt: null,
+      updatedBy,
+      updatedAt: createdAt,
+    });
+  }
 }

@@ -1,11 +1,20 @@
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { DriftAnswer } from '#shared/contracts/drift.js';
-import { PHENOMENA, type DriftEpoch, type MarkerDrift, type Phenomenon } from '#shared/sky/index.js';
+import {
+  PHENOMENA,
+  type DriftEpoch,
+  type Figure,
+  type MarkerDrift,
+  type Phenomenon,
+} from '#shared/sky/index.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 
-export function toDriftAnswer(drift: MarkerDrift, from: number, to: number): DriftAnswer {
+export function toDriftAnswer(
+  drift: MarkerDrift,
+  { from, to, figures }: { from: number; to: number; figures: readonly Figure[] },
+): DriftAnswer {
   return {
-    ...markerNamesOf(drift.markerKey),
+    ...markerNamesOf(drift.markerKey, figures),
     from,
     to,
     epochs: drift.epochs.map(({ year, outcome, outcomeDetail, phenomena }) => ({

@@ -14,6 +14,7 @@ import {
   gregorianShiftDays,
   julianOf,
   type DriftEpoch,
+  type Figure,
   type MarkerDrift,
   type MoonOverPlace,
   type Phenomenon,
@@ -26,12 +27,14 @@ export interface FoundFacts {
   /** The year asked for and LATER_YEARS after it. */
   drift: MarkerDrift;
   moon: MoonOverPlace;
+  /** The village's own. */
+  figures: readonly Figure[];
 }
 
-export function toFoundMarker({ found, drift, moon }: FoundFacts): FoundMarker {
+export function toFoundMarker({ found, drift, moon, figures }: FoundFacts): FoundMarker {
   const { expected } = found.occurrence;
   return {
-    ...markerNamesOf(found.markerKey),
+    ...markerNamesOf(found.markerKey, figures),
     phenomenon: found.phenomenon,
     days: occurrenceDaysOf(found.occurrence),
     daysAway: found.daysAway,
@@ -52,9 +55,13 @@ export function toFoundMarker({ found, drift, moon }: FoundFacts): FoundMarker {
   };
 }
 
-export function toNearestMarker(candidate: MarkerCandidate, wanted: WantedDays): NearestMarker {
+export function toNearestMarker(
+  candidate: MarkerCandidate,
+  wanted: WantedDays,
+  figures: readonly Figure[],
+): NearestMarker {
   return {
-    ...markerNamesOf(candidate.markerKey),
+    ...markerNamesOf(candidate.markerKey, figures),
     phenomenon: candidate.phenomenon,
     days: occurrenceDaysOf(candidate.occurrence),
     daysAway: daysAwayOf(candidate.occurrence.expected.dayNumber, wanted),
@@ -62,12 +69,16 @@ export function toNearestMarker(candidate: MarkerCandidate, wanted: WantedDays):
 }
 
 /** @param drift the year since which people go by it, and the year asked for */
-export function toOldMarkerNow(drift: MarkerDrift, phenomenon: Phenomenon): OldMarkerNow {
+export function toOldMarkerNow(
+  drift: MarkerDrift,
+  phenomenon: Phenomenon,
+  figures: readonly Figure[],
+): OldMarkerNow {
   const [then, now] = drift.epochs;
   if (!then || !now) throw new RangeError('An old marker is looked up in two years.');
   const [dayThen, dayNow] = [firstDay(then, phenomenon), firstDay(now, phenomenon)];
   return {
-    ...markerNamesOf(drift.markerKey),
+    ...markerNamesOf(drift.markerKey, figures),
     phenomenon,
     then: toDayIn(then, phenomenon),
     now: toDayIn(now, phenomenon),

@@ -16,7 +16,6 @@ import {
   type YearsAnswer,
 } from '#shared/contracts/finder.js';
 import type { MarkerNames } from '#shared/contracts/stars.js';
-import type { Place } from '#shared/contracts/places.js';
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import { civilDateFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
 import {
@@ -29,9 +28,9 @@ import {
 import { setImmediate } from 'node:timers/promises';
 import type { Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
-import type { PlacesService } from '../places/places.service.js';
+import type { PlacesService, VillagePlace } from '../places/places.service.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
-import { ALL_MARKER_KEYS, markerNamesOf } from '../stars/marker-names.service.js';
+import { allMarkerKeys, markerNamesOf } from '../stars/marker-names.service.js';
 import { toCivilDay, toFoundMarker, toNearestMarker, toOldMarkerNow } from './finder.mapper.js';
 import { PlaceCandidatesService } from './place-candidates.service.js';
 import { askedDays, yearsAround } from './wanted-days.js';
@@ -50,7 +49,7 @@ export class FinderService {
   ) {}
 
   async find(actor: Actor, placeId: string, query: FinderQuery): Promise<FinderAnswer> {
-    const place = await this.places.read(actor, placeId);
+    const place = await this.places.watched(actor, placeId);
     const old = oldMarkerOf(place, query);
     const wanted = askedDays(query) ?? oldDays(old, query.year);
     const ofYear = await this.candidates.inYear(place, query.year);
@@ -72,8 +71,8 @@ export class FinderService {
       items: await this.described(place, query.year, ranked.slice(0, FOUND_MAX)),
       total: ranked.length,
       nearest: {
-        before: before && toNearestMarker(before, wanted),
-        after: after && toNearestMarker(after, wanted),
+        before: before && toNearestMarker(before, wanted, place.figures),
+        after: after && toNearestMarker(after, wanted, place.figures),
       },
       darkestDeg: darkestOfNightDeg(siteOf(place), Math.floor((wanted.from + wanted.to) / 2)),
     };
@@ -81,17 +80,17 @@ export class FinderService {
 
   /** Every marker that a place's village can name. */
   async names(actor: Actor, placeId: string): Promise<MarkerNames[]> {
-    await this.places.read(actor, placeId);
-    return ALL_MARKER_KEYS.map(markerNamesOf);
+    const { figures } = await this.places.watched(actor, placeId);
+    return allMarkerKeys(figures).map((markerKey) => markerNamesOf(markerKey, figures));
   }
 
   /** Days of some markers in some years; a screen asks a few years at a time, shows how far it is and may stop. */
   async compareYears(actor: Actor, placeId: string, input: ComparisonInput): Promise<YearsAnswer> {
-    const place = await this.places.read(actor, placeId);
+    const place = await this.places.watched(actor, placeId);
     const years = [...new Set(input.years)].sort((a, b) => a - b);
     const items: YearsAnswer['items'] = [];
     for (const [index, { markerKey, phenomenon }] of input.markers.entries()) {
-      if (resolveMarker(markerKey) === null) {
+      if (resolveMarker(markerKey, place.figures) === null) {
         throw invalidField(`markers.${index}.markerKey`, 'unknown-marker');
       }
       for (const { year, phenomena } of driftAt(place, markerKey, years).epochs) {
@@ -104,7 +103,7 @@ export class FinderService {
   }
 
   private async described(
-    place: Place,
+    place: VillagePlace,
     year: number,
     ranked: readonly RankedMarker[],
   ): Promise<FoundMarker[]> {
@@ -116,22 +115,22 @@ export class FinderService {
       const drift = drifts.get(found.markerKey) ?? driftAt(place, found.markerKey, years);
       drifts.set(found.markerKey, drift);
       const moon = moonOverPlace(site, found.occurrence.expected.jdUt);
-      items.push(toFoundMarker({ found, drift, moon }));
+      items.push(toFoundMarker({ found, drift, moon, figures: place.figures }));
       if (index % MARKERS_AT_A_TIME === 0) await setImmediate();
     }
     return items;
   }
 }
 
-function driftAt(place: Place, markerKey: string, years: readonly number[]): MarkerDrift {
-  return driftOf(markerKey, siteOf(place), settingsOf(place), years);
+function driftAt(place: VillagePlace, markerKey: string, years: readonly number[]): MarkerDrift {
+  return driftOf(markerKey, siteOf(place), settingsOf(place), years, place.figures);
 }
 
-function oldMarkerOf(place: Place, query: FinderQuery): OldMarkerNow | null {
+function oldMarkerOf(place: VillagePlace, query: FinderQuery): OldMarkerNow | null {
   const { oldMarker, since, year, oldPhenomenon = DEFAULT_OLD_PHENOMENON } = query;
   if (oldMarker === undefined || since === undefined) return null;
-  if (resolveMarker(oldMarker) === null) throw invalidField('oldMarker', 'unknown-marker');
-  return toOldMarkerNow(driftAt(place, oldMarker, [since, year]), oldPhenomenon);
+  if (resolveMarker(oldMarker, place.figures) === null) throw invalidField('oldMarker', 'unknown-marker');
+  return toOldMarkerNow(driftAt(place, oldMarker, [since, year]), oldPhenomenon, place.figures);
 }
 
 /** The old marker's day of old, in the year asked for: the same place in the seasons, by the Gregorian calendar. */

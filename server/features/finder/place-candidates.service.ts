@@ -6,10 +6,10 @@ import {
   type WithoutDate,
 } from '#shared/calendar/marker-candidates.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
-import { computeSkyYear } from '#shared/sky/index.js';
+import { computeSkyYear, type Figure } from '#shared/sky/index.js';
 import { setImmediate } from 'node:timers/promises';
-import { settingsOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
-import { ALL_MARKER_KEYS, markerNamesOf } from '../stars/marker-names.service.js';
+import { figuresOf, settingsOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
+import { allMarkerKeys, markerNamesOf } from '../stars/marker-names.service.js';
 
 /** All that a place's sky offers a calendar in one civil year. */
 export interface PlaceCandidates {
@@ -28,7 +28,7 @@ export class PlaceCandidatesService {
   private readonly kept = new Map<string, Promise<PlaceCandidates>>();
 
   async inYear(place: WatchedPlace, year: number): Promise<PlaceCandidates> {
-    const key = canonicalJson([year, siteOf(place), settingsOf(place)]);
+    const key = canonicalJson([year, siteOf(place), settingsOf(place), figuresOf(place)]);
     const found = this.kept.get(key) ?? lookThrough(place, year);
     // A Map keeps the order in which keys were set: what was used last goes to the end.
     this.kept.delete(key);
@@ -41,16 +41,17 @@ export class PlaceCandidatesService {
 }
 
 async function lookThrough(place: WatchedPlace, year: number): Promise<PlaceCandidates> {
-  const markerKeys = ALL_MARKER_KEYS;
+  const figures = figuresOf(place);
+  const markerKeys = allMarkerKeys(figures);
   const site = siteOf(place);
   const settings = settingsOf(place);
   const candidates: MarkerCandidate[] = [];
   const without: WithoutDate = { neverSets: 0, neverClearsSkyline: 0, neverDarkEnough: 0 };
   for (let start = 0; start < markerKeys.length; start += MARKERS_AT_A_TIME) {
     const keys = markerKeys.slice(start, start + MARKERS_AT_A_TIME);
-    const years = computeSkyYear(keys, site, settings, year).map((markerYear) => ({
+    const years = computeSkyYear(keys, site, settings, year, figures).map((markerYear) => ({
       markerYear,
-      sight: sightOf(markerYear.markerKey),
+      sight: sightOf(markerYear.markerKey, figures),
     }));
     for (const { markerYear, sight } of years) candidates.push(...candidatesOf(markerYear, sight));
     const counts = countWithoutDate(years);
@@ -62,7 +63,7 @@ async function lookThrough(place: WatchedPlace, year: number): Promise<PlaceCand
   return { candidates, without, searched: markerKeys.length };
 }
 
-function sightOf(markerKey: string): MarkerSight {
-  const { vMag, kind } = markerNamesOf(markerKey);
-  return { vMag, isFigure: kind === 'figure' };
+function sightOf(markerKey: string, figures: readonly Figure[]): MarkerSight {
+  const { vMag, kind } = markerNamesOf(markerKey, figures);
+  return { vMag, isFigure: kind !== 'star' };
 }

@@ -8,7 +8,6 @@ import type {
   LookPointer,
   LookSeason,
 } from '#shared/contracts/look.js';
-import type { Place } from '#shared/contracts/places.js';
 import { isoDateOf } from '#shared/kernel/iso-date.js';
 import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type {
@@ -19,13 +18,14 @@ import type {
   PlanetBeside,
   Pointer,
 } from '#shared/sky/index.js';
+import type { VillagePlace } from '../places/places.service.js';
 import { localTimeOf, type PlaceClock } from '../stars/local-time.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 
 const MINUTES_PER_DAY = 1440;
 
 export interface LookFacts {
-  place: Place;
+  place: VillagePlace;
   phenomenon: Phenomenon;
   sky: SkyLook;
   season: LookSeason;
@@ -41,7 +41,7 @@ export function toLook({ place, phenomenon, sky, season, alternative }: LookFact
     placeName: place.name,
     latitudeDeg: place.latitudeDeg,
     skyline: place.skyline,
-    marker: markerNamesOf(sky.markerKey),
+    marker: markerNamesOf(sky.markerKey, place.figures),
     phenomenon,
     side: sky.side,
     date: isoDateOf(sky.dayNumber),

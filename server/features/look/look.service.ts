@@ -1,5 +1,4 @@
 import type { Look, LookQuery } from '#shared/contracts/look.js';
-import type { Place } from '#shared/contracts/places.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { resolveMarker, watchTimes, whereToLook } from '#shared/sky/index.js';
 import type { Phenomenon, WatchSide } from '#shared/sky/index.js';
@@ -7,7 +6,7 @@ import type { Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { civilDateAt } from '../places/place-day.service.js';
-import type { PlacesService } from '../places/places.service.js';
+import type { PlacesService, VillagePlace } from '../places/places.service.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
 import type { LookSeasonService } from './look-season.service.js';
 import { toLook } from './look.mapper.js';
@@ -23,19 +22,19 @@ export class LookService {
   ) {}
 
   async read(actor: Actor, placeId: string, query: LookQuery): Promise<Look> {
-    const place = await this.places.read(actor, placeId);
+    const place = await this.places.watched(actor, placeId);
     return this.at(place, query);
   }
 
-  private at(place: Place, { marker, phenomenon, date }: LookQuery): Look {
-    if (resolveMarker(marker) === null) throw invalidField('marker', 'unknown-marker');
+  private at(place: VillagePlace, { marker, phenomenon, date }: LookQuery): Look {
+    if (resolveMarker(marker, place.figures) === null) throw invalidField('marker', 'unknown-marker');
     const side = sideOf(phenomenon);
     const dayNumber = date === undefined ? this.nextDay(place, marker, phenomenon) : dayNumberFromIso(date);
     const season = this.seasons.of(place, marker, phenomenon, dayNumber);
     return toLook({
       place,
       phenomenon,
-      sky: whereToLook(marker, siteOf(place), settingsOf(place), dayNumber, side),
+      sky: whereToLook(marker, siteOf(place), settingsOf(place), dayNumber, side, place.figures),
       season,
       alternative:
         season.days === null ? this.seasons.alternative(place, marker, phenomenon, dayNumber) : null,
@@ -43,7 +42,7 @@ export class LookService {
   }
 
   /** The next morning or evening while the star's days are open, else its next expected day. */
-  private nextDay(place: Place, markerKey: string, phenomenon: Phenomenon): number {
+  private nextDay(place: VillagePlace, markerKey: string, phenomenon: Phenomenon): number {
     const today = dayNumberFromIso(civilDateAt(this.clock.now(), place));
     const { stopLookingJdUt } = watchTimes(siteOf(place), today);
     const nowJdUt = JD_UNIX_EPOCH + this.clock.now().getTime() / MS_PER_DAY;

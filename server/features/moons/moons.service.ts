@@ -1,6 +1,5 @@
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { MoonQuestion, MoonRule, MoonTable } from '#shared/contracts/moons.js';
-import type { Place } from '#shared/contracts/places.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import {
   type LocalMonth,
@@ -19,7 +18,7 @@ import {
 import { setImmediate } from 'node:timers/promises';
 import type { Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
-import type { PlacesService } from '../places/places.service.js';
+import type { PlacesService, VillagePlace } from '../places/places.service.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import type { SkyYearsService } from '../stars/sky-years.service.js';
@@ -50,7 +49,7 @@ export class MoonsService {
   ) {}
 
   async read(actor: Actor, placeId: string, question: MoonQuestion): Promise<MoonTable> {
-    return this.tableOf(await this.places.read(actor, placeId), question);
+    return this.tableOf(await this.places.watched(actor, placeId), question);
   }
 
   async csv(
@@ -58,13 +57,13 @@ export class MoonsService {
     placeId: string,
     question: MoonQuestion,
   ): Promise<{ text: string; fileName: string }> {
-    const place = await this.places.read(actor, placeId);
+    const place = await this.places.watched(actor, placeId);
     return moonsCsv(place, await this.tableOf(place, question));
   }
 
   /** The same question to the same place is computed once. */
-  private async tableOf(place: Place, question: MoonQuestion): Promise<MoonTable> {
-    const key = canonicalJson([place.id, place.version, { ...question }]);
+  private async tableOf(place: VillagePlace, question: MoonQuestion): Promise<MoonTable> {
+    const key = canonicalJson([place.id, place.version, place.figures, { ...question }]);
     const table = this.kept.get(key) ?? this.compute(place, question);
     this.kept.delete(key);
     this.kept.set(key, table);
@@ -75,7 +74,7 @@ export class MoonsService {
     return table;
   }
 
-  private async compute(place: Place, question: MoonQuestion): Promise<MoonTable> {
+  private async compute(place: VillagePlace, question: MoonQuestion): Promise<MoonTable> {
     const { year } = question;
     const [site, settings] = [siteOf(place), settingsOf(place)];
     const { lunations, firstDayNumber, lastDayNumber, sourceKeys, engineVersion } = moonYear(
@@ -84,7 +83,7 @@ export class MoonsService {
       year,
     );
     await setImmediate();
-    const rule = ruleOf(question);
+    const rule = ruleOf(place, question);
     const months = rule === null ? [] : await this.monthsAround(place, year, rule);
     const venus = venusYear(site, settings, year);
     return {
@@ -93,18 +92,20 @@ export class MoonsService {
       lastDayNumber,
       moons: lunations.map((lunation) => toMoonRow(lunation, monthOf(lunation, months), place)),
       rule: rule && this.describe(place, year, rule),
-      markers: OFFERED_SIGNS.map(markerNamesOf),
+      markers: [...place.figures.map(({ key }) => key), ...OFFERED_SIGNS].map((key) =>
+        markerNamesOf(key, place.figures),
+      ),
       venus: toVenus(venus),
       sourceKeys: [...sourceKeys, ...venus.sourceKeys],
       engineVersion,
     };
   }
 
-  private describe(place: Place, year: number, rule: Rule): MoonRule {
+  private describe(place: VillagePlace, year: number, rule: Rule): MoonRule {
     const [markerYear] = this.skyYears.markerYears(place, year, [rule.markerKey]);
     if (!markerYear) throw new RangeError(`${rule.markerKey} is no marker.`);
     return {
-      marker: markerNamesOf(rule.markerKey),
+      marker: markerNamesOf(rule.markerKey, place.figures),
       phenomenon: rule.phenomenon,
       signMonth: rule.signMonth,
       begins: rule.begins,
@@ -113,13 +114,13 @@ export class MoonsService {
     };
   }
 
-  private signsIn(place: Place, year: number, { markerKey, phenomenon }: Rule): Occurrence[] {
+  private signsIn(place: VillagePlace, year: number, { markerKey, phenomenon }: Rule): Occurrence[] {
     const [markerYear] = this.skyYears.markerYears(place, year, [markerKey]);
     return [...(markerYear?.phenomena[phenomenon].occurrences ?? [])];
   }
 
   /** Months from the last sign that is surely before the year to the first that is surely after it. */
-  private async monthsAround(place: Place, year: number, rule: Rule): Promise<LocalMonth[]> {
+  private async monthsAround(place: VillagePlace, year: number, rule: Rule): Promise<LocalMonth[]> {
     const atDawn = rule.phenomenon === 'heliacal-rising' || rule.phenomenon === 'cosmical-setting';
     const years = [year - 2, year - 1, year, year + 1, year + 2].filter((each) => Math.abs(each) <= 3000);
     const signs: MonthSign[] = years
@@ -139,7 +140,7 @@ export class MoonsService {
     return localMonths(begins, signs, rule.signMonth);
   }
 
-  private async lunations(place: Place, fromDay: number, toDay: number): Promise<Lunation[]> {
+  private async lunations(place: VillagePlace, fromDay: number, toDay: number): Promise<Lunation[]> {
     const [site, settings] = [siteOf(place), settingsOf(place)];
     const found = new Map<number, Lunation>();
     for (let day = fromDay; day <= toDay; day += DAYS_AT_A_TIME) {
@@ -153,9 +154,9 @@ export class MoonsService {
   }
 }
 
-function ruleOf({ marker, phenomenon, month, begins }: MoonQuestion): Rule | null {
+function ruleOf(place: VillagePlace, { marker, phenomenon, month, begins }: MoonQuestion): Rule | null {
   if (marker === undefined) return null;
-  if (resolveMarker(marker) === null) throw invalidField('marker', 'unknown-marker');
+  if (resolveMarker(marker, place.figures) === null) throw invalidField('marker', 'unknown-marker');
   return {
     markerKey: marker,
     phenomenon: phenomenon ?? 'heliacal-rising',

@@ -1,4 +1,5 @@
 import type { Place, PlaceInput, PlaceUpdate } from '#shared/contracts/places.js';
+import type { SkyFigure } from '#shared/contracts/stars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
@@ -8,7 +9,11 @@ import type { Actor } from '../../http/actor.js';
 import { notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { villageFigures } from '../figures/village-figures.service.js';
 import { fromPlaceInput, toPlace } from './places.mapper.js';
+
+/** A place with the village's own figures: what dates are computed from. */
+export type VillagePlace = Place & { figures: SkyFigure[] };
 
 export class PlacesService {
   constructor(
@@ -27,6 +32,15 @@ export class PlacesService {
 
   async read(actor: Actor, placeId: string): Promise<Place> {
     return toPlace(await findPlace(this.dataSource.manager, actor, placeId));
+  }
+
+  /** For whoever computes dates. */
+  async watched(actor: Actor, placeId: string): Promise<VillagePlace> {
+    return this.withFigures(actor, await this.read(actor, placeId));
+  }
+
+  async withFigures(actor: Actor, place: Place): Promise<VillagePlace> {
+    return { ...place, figures: await villageFigures(this.dataSource.manager, actor.communityId) };
   }
 
   async create(actor: Actor, input: PlaceInput): Promise<Place> {

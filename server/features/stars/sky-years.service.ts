@@ -2,8 +2,8 @@ import type { MarkerRow } from '#shared/contracts/stars.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { computeSkyYear, yearStrip, type MarkerYear, type StripSegment } from '#shared/sky/index.js';
 import { setImmediate } from 'node:timers/promises';
-import { settingsOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
-import { ALL_MARKER_KEYS } from './marker-names.service.js';
+import { figuresOf, settingsOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
+import { allMarkerKeys } from './marker-names.service.js';
 import { toMarkerRow } from './stars.mapper.js';
 
 /** A marker's year and what it does night by night. */
@@ -44,7 +44,8 @@ export class SkyYearsService {
     keep(this.placeYears, key, known, KEPT_PLACE_YEARS);
     const missing = [...new Set(markerKeys)].filter((markerKey) => !known.has(markerKey));
     if (missing.length > 0) {
-      for (const markerYear of computeSkyYear(missing, siteOf(place), settingsOf(place), year)) {
+      const figures = figuresOf(place);
+      for (const markerYear of computeSkyYear(missing, siteOf(place), settingsOf(place), year, figures)) {
         known.set(markerYear.markerKey, markerYear);
       }
     }
@@ -55,18 +56,20 @@ export class SkyYearsService {
   nights(place: WatchedPlace, year: number, markerKey: string): MarkerNights {
     const [markerYear] = this.markerYears(place, year, [markerKey]);
     if (!markerYear) throw new RangeError(`${markerKey} is no marker.`);
-    return { markerYear, strip: yearStrip(markerYear, siteOf(place), settingsOf(place)) };
+    return { markerYear, strip: yearStrip(markerYear, siteOf(place), settingsOf(place), figuresOf(place)) };
   }
 }
 
 async function computeTable(place: WatchedPlace, year: number): Promise<MarkerRow[]> {
   const site = siteOf(place);
   const settings = settingsOf(place);
+  const figures = figuresOf(place);
+  const allKeys = allMarkerKeys(figures);
   const rows: MarkerRow[] = [];
-  for (let start = 0; start < ALL_MARKER_KEYS.length; start += MARKERS_AT_A_TIME) {
-    const keys = ALL_MARKER_KEYS.slice(start, start + MARKERS_AT_A_TIME);
-    for (const markerYear of computeSkyYear(keys, site, settings, year)) {
-      rows.push(toMarkerRow({ markerYear, strip: yearStrip(markerYear, site, settings) }));
+  for (let start = 0; start < allKeys.length; start += MARKERS_AT_A_TIME) {
+    const keys = allKeys.slice(start, start + MARKERS_AT_A_TIME);
+    for (const markerYear of computeSkyYear(keys, site, settings, year, figures)) {
+      rows.push(toMarkerRow({ markerYear, strip: yearStrip(markerYear, site, settings, figures) }, figures));
     }
     await setImmediate();
   }
@@ -74,7 +77,7 @@ async function computeTable(place: WatchedPlace, year: number): Promise<MarkerRo
 }
 
 function keyOf(place: WatchedPlace, year: number): string {
-  return canonicalJson([year, siteOf(place), settingsOf(place)]);
+  return canonicalJson([year, siteOf(place), settingsOf(place), figuresOf(place)]);
 }
 
 /** A Map keeps the order in which keys were set: what was used last goes to the end, the first one goes. */

@@ -3,7 +3,7 @@ import type { RangedDay, SkylineEffect } from '#shared/contracts/stars.js';
 import { FIGURES, markerKeyOf, STARS, type MarkerYear, type Occurrence } from '#shared/sky/index.js';
 import type { Actor } from '../../http/actor.js';
 import type { PlacesService } from '../places/places.service.js';
-import type { WatchedPlace } from '../places/watched-place.service.js';
+import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { flatOccurrence, onFlatGround } from './flat-horizon.js';
 import { markerNamesOf } from './marker-names.service.js';
 import type { SkyYearsService } from './sky-years.service.js';
@@ -13,7 +13,7 @@ const BRIGHTER_THAN_V = 1.5;
 /** The two dates that people wait for. */
 const SHOWN = ['heliacal-rising', 'heliacal-setting'] as const;
 
-const MARKER_KEYS: readonly string[] = [
+const BUILT_IN_KEYS: readonly string[] = [
   ...FIGURES.map((figure) => figure.key),
   ...STARS.filter((star) => star.vMag < BRIGHTER_THAN_V)
     .sort((a, b) => a.vMag - b.vMag)
@@ -28,13 +28,14 @@ export class SkylineEffectsService {
   ) {}
 
   async ofPlace(actor: Actor, placeId: string, year: number): Promise<SkylineEffect[]> {
-    return this.of(await this.places.read(actor, placeId), year);
+    return this.of(await this.places.watched(actor, placeId), year);
   }
 
-  /** The same for any place, saved or not. Figures first, then stars by brightness. */
+  /** The same for any place, saved or not. Figures first, the village's own before others, then stars by brightness. */
   of(place: WatchedPlace, year: number): SkylineEffect[] {
-    const hills = this.skyYears.markerYears(place, year, MARKER_KEYS);
-    const flats = this.skyYears.markerYears(onFlatGround(place), year, MARKER_KEYS);
+    const keys = [...figuresOf(place).map((figure) => figure.key), ...BUILT_IN_KEYS];
+    const hills = this.skyYears.markerYears(place, year, keys);
+    const flats = this.skyYears.markerYears(onFlatGround(place), year, keys);
     return hills.flatMap((hill, index) => {
       const flat = flats[index];
       return flat ? SHOWN.flatMap((phenomenon) => this.compare(place, flat, hill, phenomenon)) : [];
@@ -52,7 +53,7 @@ export class SkylineEffectsService {
       ? flatOccurrence(this.skyYears, place, hill, phenomenon, overHill)
       : (flat.phenomena[phenomenon].occurrences[0] ?? null);
     if (overHill === null && overFlat === null) return [];
-    const { markerKey, name, designation } = markerNamesOf(hill.markerKey);
+    const { markerKey, name, designation } = markerNamesOf(hill.markerKey, figuresOf(place));
     return [
       {
         markerKey,

@@ -1,14 +1,14 @@
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { CrossingDetail, MarkerRow, OccurrenceDetail, PhenomenonDays } from '#shared/contracts/stars.js';
 import { compassPoint, PHENOMENA } from '#shared/sky/index.js';
-import type { Crossing, Occurrence, Phenomenon, PhenomenonResult } from '#shared/sky/index.js';
+import type { Crossing, Figure, Occurrence, Phenomenon, PhenomenonResult } from '#shared/sky/index.js';
 import { localTimeOf, type PlaceClock } from './local-time.service.js';
 import { markerNamesOf } from './marker-names.service.js';
 import type { MarkerNights } from './sky-years.service.js';
 
-export function toMarkerRow({ markerYear, strip }: MarkerNights): MarkerRow {
+export function toMarkerRow({ markerYear, strip }: MarkerNights, figures: readonly Figure[] = []): MarkerRow {
   return {
-    ...markerNamesOf(markerYear.markerKey),
+    ...markerNamesOf(markerYear.markerKey, figures),
     outcome: markerYear.outcome,
     outcomeDetail: markerYear.outcomeDetail,
     nightsHidden: markerYear.nightsHidden,

@@ -5,7 +5,7 @@ import type { MarkerYear, Occurrence, Phenomenon } from '#shared/sky/index.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { PlacesService } from '../places/places.service.js';
-import { siteOf, type WatchedPlace } from '../places/watched-place.service.js';
+import { figuresOf, siteOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { flatOccurrence } from './flat-horizon.js';
 import { membersOf } from './marker-names.service.js';
 import type { SkyYearsService } from './sky-years.service.js';
@@ -30,21 +30,22 @@ export class StarsService {
   ) {}
 
   async list(actor: Actor, placeId: string, year: number): Promise<StarTable> {
-    return this.tableOf(await this.places.read(actor, placeId), year);
+    return this.tableOf(await this.places.watched(actor, placeId), year);
   }
 
   async csv(actor: Actor, placeId: string, year: number): Promise<{ text: string; fileName: string }> {
-    const place = await this.places.read(actor, placeId);
+    const place = await this.places.watched(actor, placeId);
     return starsCsv(place, await this.tableOf(place, year));
   }
 
   async read(actor: Actor, placeId: string, markerKey: string, year: number): Promise<MarkerDetail> {
-    const place = await this.places.read(actor, placeId);
-    if (resolveMarker(markerKey) === null) throw notFound();
+    const place = await this.places.watched(actor, placeId);
+    const figures = figuresOf(place);
+    if (resolveMarker(markerKey, figures) === null) throw notFound();
     const nights = this.skyYears.nights(place, year, markerKey);
     const { markerYear } = nights;
     return {
-      ...toMarkerRow(nights),
+      ...toMarkerRow(nights, figures),
       placeId,
       year,
       ...civilYearDays(year),
@@ -54,7 +55,7 @@ export class StarsService {
         ),
       ),
       basis: { ...markerYear.basis, clarityByMonth: [...markerYear.basis.clarityByMonth] },
-      members: membersOf(markerKey),
+      members: membersOf(markerKey, figures),
       skyline: place.skyline,
     };
   }

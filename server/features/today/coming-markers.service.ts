@@ -3,7 +3,7 @@ import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions
 import { civilDateFromIso, dayNumberFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
 import { FIGURES, markerKeyOf, STARS } from '#shared/sky/index.js';
 import type { MarkerYear, Occurrence, Phenomenon } from '#shared/sky/index.js';
-import type { WatchedPlace } from '../places/watched-place.service.js';
+import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import type { SkyYearsService } from '../stars/sky-years.service.js';
 import type { StarsService } from '../stars/stars.service.js';
@@ -22,7 +22,7 @@ const LATER_COUNT = 3;
 
 /** What nobody has to be taught to find, besides what the village's own calendar goes by. */
 const BRIGHTER_THAN_V = 2;
-const GOOD_KEYS: readonly string[] = [
+const BUILT_IN_KEYS: readonly string[] = [
   ...FIGURES.map((figure) => figure.key),
   ...STARS.filter((star) => star.vMag < BRIGHTER_THAN_V).map((star) => markerKeyOf(star.hr)),
 ];
@@ -65,9 +65,10 @@ export class ComingMarkersService {
     years: readonly number[],
     published: readonly PublishedCalendar[],
   ): Candidate[] {
+    const keys = [...figuresOf(place).map((figure) => figure.key), ...BUILT_IN_KEYS];
     const found = new Map<string, Candidate>();
     for (const year of years) {
-      for (const markerYear of this.skyYears.markerYears(place, year, GOOD_KEYS)) {
+      for (const markerYear of this.skyYears.markerYears(place, year, keys)) {
         for (const phenomenon of NEWS) {
           markerYear.phenomena[phenomenon].occurrences.forEach((occurrence, index) => {
             if (!servesWell(markerYear, occurrence)) return;
@@ -115,7 +116,7 @@ export class ComingMarkersService {
           vMagOf(a) - vMagOf(b),
       )
       .map(({ place, markerYear, phenomenon, occurrence, leads }) => ({
-        marker: markerNamesOf(markerYear.markerKey),
+        marker: markerNamesOf(markerYear.markerKey, figuresOf(place)),
         phenomenon,
         occurrence: this.stars.occurrenceDetail(place, markerYear, phenomenon, occurrence),
         daysAway: occurrence.expected.dayNumber - today,
@@ -150,6 +151,6 @@ function keyOf({ markerKey, year }: MarkerYear, phenomenon: Phenomenon, index: n
   return `${markerKey} ${phenomenon} ${year} ${index}`;
 }
 
-function vMagOf({ markerYear }: Candidate): number {
-  return markerNamesOf(markerYear.markerKey).vMag;
+function vMagOf({ place, markerYear }: Candidate): number {
+  return markerNamesOf(markerYear.markerKey, figuresOf(place)).vMag;
 }

@@ -33,7 +33,8 @@ export class TodayService {
   async read(actor: Actor, placeId: string | null): Promise<Today> {
     const { places, calendars, coming, waiting, clock } = this.parts;
     const all = await calendars.listOf(actor.person, actor.communityId);
-    const place = choosePlace(await places.list(actor), all, placeId, clock.now());
+    const chosen = choosePlace(await places.list(actor), all, placeId, clock.now());
+    const place = chosen && (await places.withFigures(actor, chosen));
     const date = place === null ? clock.now().toISOString().slice(0, 10) : civilDateAt(clock.now(), place);
     const { year, month } = civilDateFromIso(date);
     const { hole, row } = boardDayOf(date);

@@ -14,7 +14,7 @@ import { seesDrafts, type Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { readDraft } from '../calendars/draft.service.js';
-import type { SkyDatesService } from '../calendars/sky-dates.service.js';
+import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { checkSeal } from './seal.service.js';
 import { toHeader, toVersionEntry } from './versions.mapper.js';
 import { findVersion, frozenEntries } from './versions.repository.js';
@@ -79,7 +79,7 @@ export class FrozenContentService {
         officerLanguage: { tag: community.officerLanguageTag, name: community.officerLanguageName },
         weatherContact: community.weatherContact,
         agricultureContact: community.agricultureContact,
-        place,
+        place: withUsedFigures(place, contents),
         markers: this.sky.frozenMarkers(place, calendar.year, contents),
       },
       entries: entries.map(({ row, dates }) => ({ entryId: row.id, content: row.content, dates })),

@@ -294,6 +294,7 @@ export const texts = {
   marker: {
     title: 'Choose a star or figure',
     search: 'Find it by name, letter or HR number',
+    own: 'the village’s own',
     inUse: 'in this calendar',
     showing_one: 'Showing {{count}} of {{total}}. Another letter narrows the list.',
     showing_other: 'Showing {{count}} of {{total}}. Another letter narrows the list.',

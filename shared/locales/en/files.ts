@@ -3,7 +3,7 @@ export const texts = {
   starsCsv: {
     fileName: '{{place}} {{year}} stars',
     kind: 'kind',
-    kinds: { star: 'star', figure: 'group of stars' },
+    kinds: { star: 'star', figure: 'group of stars', 'own-figure': 'the village’s own' },
     name: 'name',
     designation: 'designation',
     hr: 'HR number',

@@ -4,6 +4,7 @@ export const texts = {
     label: 'Parts of the village',
     people: 'People',
     places: 'Places',
+    figures: 'Figures',
     asking: 'To ask',
     settings: 'Settings',
     records: 'Records',

@@ -65,6 +65,8 @@ export const texts = {
   toMoons: 'Moons and Venus of this year',
 
   group: 'a group of stars',
+  ownFigure: 'the village’s own',
+  patch: 'a patch of sky',
   hr: 'HR {{hr}}',
   brightness: {
     'very-bright': 'very bright',
@@ -88,15 +90,27 @@ export const texts = {
 
   none: {
     'never-sets-north':
-      'Never sets here: it stands in the north all night, all year. It has no first or last day.',
+      'Never sets here: it stands in the north whenever it is dark. It has no first or last day.',
     'never-sets-south':
-      'Never sets here: it stands in the south all night, all year. It has no first or last day.',
+      'Never sets here: it stands in the south whenever it is dark. It has no first or last day.',
     'never-rises': 'Never rises here: it stays below the ground all year.',
     'below-skyline': 'Never clears your skyline: the hills stand higher than it climbs.',
     'never-dark-enough':
       'The nights here are too light for it: the Sun never goes deep enough on the days that matter.',
     'none-in-this-year': 'None of its days falls in {{year}}.',
   },
+  instead: {
+    turns:
+      'It can still tell the season: at the same hour of the night it stands on another side of the pole in each month.',
+    rises: 'The stars that do come and go here can carry the work instead.',
+    light:
+      'In the light nights the Sun, the Moon and signs of nature carry the season; in the dark months other stars do.',
+    otherYear: 'Look at the year before or after.',
+    lightNights: 'The nights are too light for it: {{ranges}}.',
+    toStars: 'Stars that serve here',
+  },
+  lightNightsHere:
+    'Around midsummer no night here is dark enough for stars. The first and last days beside that time come from the light, not from the star: hold work then by the Sun, the Moon and signs of nature.',
 
   card: {
     comesBack: 'Comes back on the <1>morning of about {{day}}</1>, {{between}}.',
@@ -213,6 +227,7 @@ export const texts = {
     place: 'Look at the place',
     ways: 'More about it',
     way: {
+      figure: 'Its story and its stars',
       drift: 'How it moved through the centuries',
       air: 'In clear and in hazy air',
     },

@@ -325,6 +325,7 @@ export const texts = {
         thresholds: 'The eye-and-air rule of the place changed.',
         where: 'The coordinates, the elevation or the clock of the place changed.',
         skylineRule: 'How the skyline counts changed.',
+        figures: 'A figure of the village that entries go by is described differently.',
       },
       engineVersion: 'The version of the reckoning is now {{after}}; before, {{before}}.',
       other: 'Something else that the version rests on changed.',

@@ -67,8 +67,8 @@ function eachMinuteSeen(
   moonNl: MoonNl,
   visit: (jdUt: number) => boolean,
 ): void {
-  const { year, ground, starIndex } = marker;
-  const place = year.stars.placeOf(starIndex);
+  const { year, ground } = marker;
+  const place = year.stars.placeOf(marker.marker.starRef);
   const atSkyline = crossing.anInstantJdUt + turn * year.sidereal.periodDays;
   const inward = facts.crossing === 'rising' ? MINUTE_DAYS : -MINUTE_DAYS;
   for (let minute = 0; minute < LONGEST_MINUTES; minute += 1) {

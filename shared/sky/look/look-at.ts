@@ -63,7 +63,7 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
 
 function thenOf(marker: MarkerAtPlace, jdUt: number): StarThen {
   const sky = skyAt(marker.year, marker.ground, jdUt);
-  return { sky, star: sky.starAt(marker.year.stars.placeOf(marker.starIndex)) };
+  return { sky, star: sky.starAt(marker.year.stars.placeOf(marker.marker.starRef)) };
 }
 
 /** The best moment, then the others at which the star is up: a planet may come up while people watch. */

@@ -46,7 +46,7 @@ export function lookPathOf(
 
 function momentOf(marker: MarkerAtPlace, rule: SightRule, jdUt: number): LookMoment {
   const sky = skyAt(marker.year, marker.ground, jdUt);
-  const star = sky.starAt(marker.year.stars.placeOf(marker.starIndex));
+  const star = sky.starAt(marker.year.stars.placeOf(marker.marker.starRef));
   const above = sky.aboveSkylineRad(star);
   const sunward = star.azimuthRad - sky.sunAzimuthRad;
   const isUp = above >= 0;

@@ -29,7 +29,7 @@ export function pointersOf(
   sky: SkyAt,
   star: HorizontalPlace,
 ): Pointer[] {
-  const own = new Set([marker.marker.hr, ...(marker.marker.figure?.memberHrs ?? [])]);
+  const own = new Set([marker.marker.star?.hr, ...(marker.marker.figure?.memberHrs ?? [])]);
   const seen = STARS.flatMap((each, index) => {
     if (each.vMag > BRIGHT_MAG || own.has(each.hr) || !isNamed(each)) return [];
     const at = sky.starAt(marker.year.stars.placeOf(index));

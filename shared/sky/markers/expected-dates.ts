@@ -33,11 +33,11 @@ function expectedDays(marker: MarkerAtPlace, phenomenon: Phenomenon): number[] {
   return days;
 }
 
-const bareMarkers: readonly ResolvedMarker[] = STARS.map((star) => ({
+const bareMarkers: readonly ResolvedMarker[] = STARS.map((star, starRef) => ({
   key: markerKeyOf(star.hr),
   star,
   figure: null,
-  hr: star.hr,
+  starRef,
   vMag: star.vMag,
   override: null,
 }));
@@ -84,6 +84,7 @@ export function depthAtCrossingOf(
   const override = {
     sameSideDeg: question.thresholdsDeg.sameSide,
     oppositeSideDeg: question.thresholdsDeg.oppositeSide,
+    source: 'as given',
   };
   const ground = { ...placeYear.ground, skyline: levelSkyline(question.skylineDeg * RAD_PER_DEG) };
   const atPlace = markerAtPlace({ ...placeYear, ground }, { ...marker, override });

@@ -9,12 +9,10 @@ import { type MarkerAtPlace, markerAtPlace, type PlaceYear } from './place-year.
 /** What a marker's dates rest on. */
 export function basisOf(marker: MarkerAtPlace): Basis {
   const { settings, threshold } = marker;
-  const overridden = marker.marker.override !== null;
+  const { override } = marker.marker;
   return {
     thresholdSet: settings.thresholdSet,
-    thresholdSource: overridden
-      ? 'class of the figure, third magnitude: Ideler 1819 after Ptolemy, in Vogt 1920 p. 17'
-      : THRESHOLD_SET_FACTS[settings.thresholdSet].source,
+    thresholdSource: override ? override.source : THRESHOLD_SET_FACTS[settings.thresholdSet].source,
     sameSideDeg: threshold.sameSideDeg,
     oppositeSideDeg: threshold.oppositeSideDeg,
     sameSideShiftDeg: settings.sameSideShiftDeg,

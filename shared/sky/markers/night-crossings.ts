@@ -62,19 +62,24 @@ export function neededUpThere(marker: MarkerAtPlace, altitudeRad: number, night:
   return Math.sin(highUpDepthDeg(thresholdDeg, altitudeRad * DEG_PER_RAD) * RAD_PER_DEG);
 }
 
-/** Is the star up, and the sky dark enough for its altitude, when the Sun is deepest? */
+/**
+ * Is the star up, and the sky dark enough for its altitude, when the Sun is deepest?
+ * @param crossings null for a star that never sets
+ */
 function seenAtDeepest(
   marker: MarkerAtPlace,
-  crossings: { rising: SkylineCrossing; setting: SkylineCrossing },
+  crossings: { rising: SkylineCrossing; setting: SkylineCrossing } | null,
   night: number,
 ): boolean {
   const { year, ground } = marker;
   const sinDepth = sinDeepestSun(year, ground, night);
   if (sinDepth <= 0) return false;
   const siderealRad = localSiderealRad(year.sidereal, midnightOf(ground, night), ground.longitudeRad);
-  const sinceRising = wrapTau(siderealRad - crossings.rising.siderealRad);
-  if (sinceRising > wrapTau(crossings.setting.siderealRad - crossings.rising.siderealRad)) return false;
-  const place = year.stars.placeOf(marker.starIndex);
+  if (crossings) {
+    const sinceRising = wrapTau(siderealRad - crossings.rising.siderealRad);
+    if (sinceRising > wrapTau(crossings.setting.siderealRad - crossings.rising.siderealRad)) return false;
+  }
+  const place = year.stars.placeOf(marker.marker.starRef);
   const { sinDeclination, cosDeclination, rightAscensionRad } = place;
   const star = horizontalOf(ground.latitude, sinDeclination, cosDeclination, siderealRad - rightAscensionRad);
   return sinDepth >= neededUpThere(marker, star.altitudeRad, night);
@@ -83,9 +88,9 @@ function seenAtDeepest(
 /** Which nights of a span let the star be seen high up, at its culmination or at the Sun's deepest; 1 for each. */
 export function seenHighUp(marker: MarkerAtPlace, fromNight: number, toNight: number): Uint8Array {
   const seen = new Uint8Array(toNight - fromNight + 1);
-  const { crossings } = marker.star;
-  if (!crossings) return seen;
-  const culmination = culminationOf(marker.year, marker.ground, marker.starIndex);
+  const { crossings, outcome } = marker.star;
+  if (outcome === 'never-clears-skyline') return seen;
+  const culmination = culminationOf(marker.year, marker.ground, marker.marker.starRef);
   eachReturn(marker, culmination, fromNight, toNight, (night, sun) => {
     const needed = neededUpThere(marker, culmination.starAltitudeRad, night);
     if (sinSunDepth(culmination, sun) >= needed) seen[night - fromNight] = 1;

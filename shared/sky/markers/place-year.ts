@@ -2,7 +2,6 @@ import { latitudeOf } from '../horizon/horizontal.js';
 import { prepareSkyline } from '../horizon/skyline.js';
 import type { PreparedYear } from '../phenomena/prepared-year.js';
 import { type Ground, type StarAtPlace, starAtPlace } from '../phenomena/skyline-crossing.js';
-import { starIndexOf } from '../stars/star-table.js';
 import { type DayClock, dayClockOf } from '../time/civil-day.js';
 import type { Site, VisibilitySettings } from '../types.js';
 import { RAD_PER_DEG } from '../units/angle.js';
@@ -47,13 +46,11 @@ export function placeYearOf(year: PreparedYear, site: Site, settings: Visibility
 /** A marker at a place in a prepared year: its path over the skyline and its threshold. */
 export interface MarkerAtPlace extends PlaceYear {
   marker: ResolvedMarker;
-  starIndex: number;
   star: StarAtPlace;
   threshold: Threshold;
 }
 
 export function markerAtPlace(placeYear: PlaceYear, marker: ResolvedMarker): MarkerAtPlace {
-  const starIndex = starIndexOf(marker.hr) ?? 0;
   // Written out, not spread: this runs once per star of the table.
   return {
     year: placeYear.year,
@@ -62,8 +59,7 @@ export function markerAtPlace(placeYear: PlaceYear, marker: ResolvedMarker): Mar
     settings: placeYear.settings,
     window: placeYear.window,
     marker,
-    starIndex,
-    star: starAtPlace(placeYear.year, placeYear.ground, starIndex),
+    star: starAtPlace(placeYear.year, placeYear.ground, marker.starRef),
     threshold: thresholdOf(placeYear.settings.thresholdSet, marker.vMag, marker.override),
   };
 }

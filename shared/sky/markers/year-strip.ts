@@ -61,6 +61,18 @@ function cycleOf(
   };
 }
 
+function cyclesOf(
+  marker: MarkerAtPlace,
+  crossings: { rising: SkylineCrossing; setting: SkylineCrossing },
+): Cycle[] {
+  const disappearances = new Disappearances(marker, crossings);
+  const cycles: Cycle[] = [];
+  for (let index = disappearances.first; index <= disappearances.last; index += 1) {
+    cycles.push(cycleOf(marker, crossings, disappearances, index));
+  }
+  return cycles;
+}
+
 function holds(nights: SeenNights | null | undefined, night: number): boolean {
   return nights !== null && nights !== undefined && night >= nights.from && night <= nights.to;
 }
@@ -74,8 +86,8 @@ function stateOf(night: number, cycles: readonly Cycle[], highUp: boolean): Nigh
   if (rises && sets) return 'rises-and-sets-in-night';
   if (rises) return 'before-dawn';
   if (sets) return 'after-dusk';
-  // Between the last evening rising and the first morning setting the star is up all night, unless the night is
-  // too light even for a star high in the sky.
+  // Between the last evening rising and the first morning setting the star is up all night, and always where it never
+  // sets, unless the night is too light even for a star high in the sky.
   return highUp ? 'all-night' : 'hidden';
 }
 
@@ -83,21 +95,11 @@ function stateOf(night: number, cycles: readonly Cycle[], highUp: boolean): Nigh
 export function yearStripOf(marker: MarkerAtPlace): StripSegment[] {
   const { firstDay, lastDay } = marker.year.civil;
   const { outcome, crossings } = marker.star;
-  if (!crossings) {
-    return [
-      {
-        state: outcome === 'never-sets' ? 'all-night' : 'hidden',
-        fromDayNumber: firstDay,
-        toDayNumber: lastDay,
-      },
-    ];
-  }
-  const disappearances = new Disappearances(marker, crossings);
-  const cycles: Cycle[] = [];
-  for (let index = disappearances.first; index <= disappearances.last; index += 1) {
-    cycles.push(cycleOf(marker, crossings, disappearances, index));
+  if (outcome === 'never-clears-skyline') {
+    return [{ state: 'hidden', fromDayNumber: firstDay, toDayNumber: lastDay }];
   }
   const seen = seenHighUp(marker, firstDay, lastDay);
+  const cycles = crossings ? cyclesOf(marker, crossings) : [];
   const segments: StripSegment[] = [];
   for (let night = firstDay; night <= lastDay; night += 1) {
     const state = stateOf(night, cycles, seen[night - firstDay] === 1);

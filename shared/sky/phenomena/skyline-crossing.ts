@@ -1,7 +1,7 @@
 import { horizontalOf, type Latitude } from '../horizon/horizontal.js';
 import type { Skyline } from '../horizon/skyline.js';
 import { starPathOf } from '../horizon/star-path.js';
-import type { StarPlace } from '../stars/star-frame.js';
+import type { StarPlace, StarRef } from '../stars/star-frame.js';
 import { instantNearEpoch } from '../time/sidereal-clock.js';
 import { clampUnit, wrapTau } from '../units/angle.js';
 import type { StarOutcome, StarOutcomeDetail } from '../vocabulary.js';
@@ -61,8 +61,8 @@ function onSkyline(crossing: SkylineCrossing, ground: Ground): SkylineCrossing {
 }
 
 /** A star's rising and setting over a place's skyline in a prepared year. */
-export function starAtPlace(year: PreparedYear, ground: Ground, starIndex: number): StarAtPlace {
-  const place = year.stars.placeOf(starIndex);
+export function starAtPlace(year: PreparedYear, ground: Ground, star: StarRef): StarAtPlace {
+  const place = year.stars.placeOf(star);
   const path = starPathOf(ground.latitude, place, ground.skyline);
   if (path.outcome !== 'rises-and-sets')
     return { outcome: path.outcome, detail: path.detail, crossings: null };
@@ -77,8 +77,8 @@ export function starAtPlace(year: PreparedYear, ground: Ground, starIndex: numbe
 }
 
 /** The star's upper culmination, whatever the skyline. */
-export function culminationOf(year: PreparedYear, ground: Ground, starIndex: number): SkylineCrossing {
-  return crossingAt(year, ground, year.stars.placeOf(starIndex), 0);
+export function culminationOf(year: PreparedYear, ground: Ground, star: StarRef): SkylineCrossing {
+  return crossingAt(year, ground, year.stars.placeOf(star), 0);
 }
 
 /** Sine of the Sun's depth at the crossing when the Sun has a given longitude. */

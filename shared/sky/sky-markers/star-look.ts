@@ -41,7 +41,7 @@ export class StarLook {
     markerKey: string,
   ) {
     this.marker = markerAtPlace(place, knownMarker(markerKey, 'spec.markerKey'));
-    this.star = place.year.stars.placeOf(this.marker.starIndex);
+    this.star = place.year.stars.placeOf(this.marker.marker.starRef);
   }
 
   /** True where the star's highest point lies south of the zenith. */

@@ -45,6 +45,14 @@ export function spaceMotionOf(row: StarRow): SpaceMotion {
   };
 }
 
+/** A direction of J2000 that keeps its place among the stars. */
+export function fixedDirection(rightAscensionDeg: number, declinationDeg: number): SpaceMotion {
+  const ra = rightAscensionDeg * RAD_PER_DEG;
+  const dec = declinationDeg * RAD_PER_DEG;
+  const direction = { x: Math.cos(dec) * Math.cos(ra), y: Math.cos(dec) * Math.sin(ra), z: Math.sin(dec) };
+  return { direction, velocityPerYear: { x: 0, y: 0, z: 0 } };
+}
+
 /** Where the star stands some Julian years after J2000, as a vector that is not of unit length. */
 export function movedDirection(motion: SpaceMotion, yearsFromJ2000: number): Vector3 {
   const { direction, velocityPerYear } = motion;

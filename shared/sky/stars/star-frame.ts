@@ -11,9 +11,12 @@ export interface StarPlace {
   cosDeclination: number;
 }
 
-/** Gives the place of any star of the table at one epoch; a few multiplications per star, nothing is kept. */
+/** What has a place among the stars: a row of the table by its index, or a direction of J2000. */
+export type StarRef = number | SpaceMotion;
+
+/** Gives the place of anything among the stars at one epoch; a few multiplications each, nothing is kept. */
 export interface StarFrame {
-  placeOf(starIndex: number): StarPlace;
+  placeOf(star: StarRef): StarPlace;
 }
 
 const DAYS_PER_JULIAN_YEAR = 365.25;
@@ -38,9 +41,9 @@ export function prepareStarFrame(epochJdUt: number): StarFrame {
   const [zx, zy, zz] = [turn(2, 0), turn(2, 1), turn(2, 2)];
 
   return {
-    placeOf(starIndex) {
-      const motion = table[starIndex];
-      if (!motion) throw new RangeError(`no star at index ${starIndex}`);
+    placeOf(star) {
+      const motion = typeof star === 'number' ? table[star] : star;
+      if (!motion) throw new RangeError('no star at this index of the table');
       const moved = movedDirection(motion, yearsFromJ2000);
       const x = xx * moved.x + xy * moved.y + xz * moved.z;
       const y = yx * moved.x + yy * moved.y + yz * moved.z;

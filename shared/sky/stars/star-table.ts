@@ -31,6 +31,13 @@ export function starIndexOf(hr: number): number | null {
   return indexByHr.get(hr) ?? null;
 }
 
+/** Where a star stood at J2000 (FK5, degrees), or null for a number that is not in the table. */
+export function starPlaceJ2000(hr: number): { rightAscensionDeg: number; declinationDeg: number } | null {
+  const index = starIndexOf(hr);
+  const row = index === null ? undefined : STAR_ROWS[index];
+  return row ? { rightAscensionDeg: row[6], declinationDeg: row[7] } : null;
+}
+
 /** A star by its HR number, or null. */
 export function findStar(hr: number): Star | null {
   const index = starIndexOf(hr);

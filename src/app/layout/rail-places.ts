@@ -5,7 +5,7 @@ export const RAIL_PLACES = [
   { place: 'today', to: paths.today(), under: ['/'] },
   { place: 'stars', to: paths.stars(), under: ['/stars', '/finder', '/look'] },
   { place: 'calendar', to: paths.calendars(), under: ['/calendars'] },
-  { place: 'village', to: paths.village(), under: ['/village', '/places'] },
+  { place: 'village', to: paths.village(), under: ['/village', '/places', '/figures'] },
 ] as const;
 
 export type RailPlace = (typeof RAIL_PLACES)[number]['place'];

@@ -101,6 +101,7 @@ function MarkerLines({ row, phenomenon, year, isInUse }: MarkerLinesProps) {
       {row.designation !== name && row.kind === 'star' && (
         <span className="text-small text-umber-soft"> · {row.designation}</span>
       )}
+      {row.kind === 'own-figure' && <span className="text-small text-umber-soft"> · {t('marker.own')}</span>}
       {isInUse && <span className="text-small text-umber-soft"> · {t('marker.inUse')}</span>}
       <span className="range-line">
         {t('marker.dayOf', {

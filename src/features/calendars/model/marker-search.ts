@@ -6,7 +6,7 @@ export const SHOWN_MAX = 30;
 
 /**
  * Stars and figures that fit what was typed: by name, letter and constellation, or HR number. The chosen one comes
- * first, then what the calendar goes by already, then figures, then the brighter before the fainter.
+ * first, then what the calendar goes by already, then the village's own figures, other figures, then the brighter before the fainter.
  */
 export function findMarkers(
   rows: readonly MarkerRow[],
@@ -18,7 +18,7 @@ export function findMarkers(
   const rank = ({ markerKey, kind }: MarkerRow) => {
     if (markerKey === chosen) return 0;
     if (inUse.has(markerKey)) return 1;
-    return kind === 'figure' ? 2 : 3;
+    return kind === 'own-figure' ? 2 : kind === 'figure' ? 3 : 4;
   };
   return rows.filter((row) => fits(row, wanted)).sort((a, b) => rank(a) - rank(b) || a.vMag - b.vMag);
 }

@@ -60,7 +60,7 @@ export function useFoundWords(isStretch: boolean): FoundWords {
       },
       exact: ({ exactness, rangeDays }) =>
         t(`exact.${exactness}`, { days: t('common:days', { count: rangeDays ?? 0 }) }),
-      ease: ({ ease, kind }) => t(ease === 'middling' && kind === 'figure' ? 'ease.figure' : `ease.${ease}`),
+      ease: ({ ease, kind }) => t(ease === 'middling' && kind !== 'star' ? 'ease.figure' : `ease.${ease}`),
       keeps: ({ laterDays }) => {
         const fifty = laterDays.at(-1) ?? null;
         if (fifty === null) return t('keeps.lost');

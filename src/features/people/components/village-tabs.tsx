@@ -13,6 +13,7 @@ export function VillageTabs() {
       label={t('tabs.label')}
       links={[
         { to: paths.villagePlaces(), label: t('tabs.places') },
+        { to: paths.villageFigures(), label: t('tabs.figures') },
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
         ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),
         { to: paths.villageSettings(), label: t('tabs.settings') },

@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { TextField } from '#src/ui/field.js';
 import { Board } from '#src/ui/surfaces.js';
 import { CoordinateFields } from './coordinate-fields.js';
+import { MapField } from './map-field.js';
 import type { FieldPart } from './place-form-parts.js';
 import { TimeZoneField } from './time-zone-field.js';
 
@@ -31,6 +32,9 @@ export function WhereBoard(part: FieldPart & { year: number }) {
         />
         <div className="grid gap-4 mid:grid-cols-2">
           <CoordinateFields {...part} />
+          <div className="mid:col-span-2">
+            <MapField {...part} />
+          </div>
           <TextField
             id="place-elevationM"
             label={t('field.elevation')}

@@ -78,6 +78,8 @@ export function HiddenCell({ row }: { row: MarkerRow }) {
 
 export function MagnitudeCell({ row }: { row: MarkerRow }) {
   const { t, i18n } = useTranslation('stars');
+  // A patch of sky has no magnitude, only a class.
+  if (row.hr === null) return <span className="text-small">{t('patch')}</span>;
   return (
     <>
       {magnitudeText(row.vMag, i18n.language)}

@@ -16,6 +16,7 @@ export function useStarNaming(): (names: MarkerNames) => StarNaming {
   const { t } = useTranslation('stars');
   return useMemo(
     () => (names) => {
+      const group = names.kind === 'star' ? '' : t(names.kind === 'own-figure' ? 'ownFigure' : 'group');
       const read = readDesignation(names.designation);
       const abbreviation = read?.constellation ?? /[A-Z][A-Za-z]{2}$/u.exec(names.designation)?.[0] ?? '';
       // Keys of the texts are the constellations and letters themselves; what is not among them stays as it is.
@@ -28,13 +29,13 @@ export function useStarNaming(): (names: MarkerNames) => StarNaming {
           : letter === ''
             ? t('numberName', { number: read.number, genitive })
             : t('fullName', { letter: `${letter}${superscript(read.index)}`, genitive });
-      const hrName = t('hr', { hr: names.hr });
+      const hrName = names.hr === null ? '' : t('hr', { hr: names.hr });
       const title = names.name !== '' ? names.name : full !== '' ? full : hrName;
       const under = names.name !== '' && full !== '' ? full : title === hrName ? constellation : hrName;
       return {
         hr: names.hr,
         title,
-        second: names.kind === 'figure' ? t('group') : under,
+        second: group === '' ? under : group,
         words: plainWords(
           [
             names.name,
@@ -43,7 +44,7 @@ export function useStarNaming(): (names: MarkerNames) => StarNaming {
             letter + (read?.index ?? ''),
             constellation,
             abbreviation,
-            names.kind === 'figure' ? t('group') : '',
+            group,
           ].join(' '),
         ),
       };

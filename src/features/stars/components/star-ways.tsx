@@ -11,12 +11,22 @@ interface Here {
 
 /** One way on from a star: its words are `stars:star.way.<key>`. */
 interface StarWay {
-  key: 'drift' | 'air';
+  key: 'figure' | 'drift' | 'air';
   path: (here: Here) => string;
+  /** Absent where it leads on from every star. */
+  isFor?: (here: Here) => boolean;
 }
+
+/** How the keys of a village's own figures begin; the figure's id follows. */
+const OWN_FIGURE = 'f-';
 
 /** Ways on from a star's page, in their order. Another one is a line here and a text. */
 const STAR_WAYS: readonly StarWay[] = [
+  {
+    key: 'figure',
+    path: ({ markerKey }) => paths.figure(markerKey.slice(OWN_FIGURE.length)),
+    isFor: ({ markerKey }) => markerKey.startsWith(OWN_FIGURE),
+  },
   { key: 'drift', path: ({ markerKey, placeId, year }) => paths.drift(markerKey, { placeId, year }) },
   { key: 'air', path: ({ markerKey, placeId, year }) => paths.air(markerKey, { placeId, year }) },
 ];
@@ -27,7 +37,7 @@ export function StarWays(here: Here) {
   return (
     <Board title={t('star.ways')}>
       <ul className="grid gap-1">
-        {STAR_WAYS.map(({ key, path }) => (
+        {STAR_WAYS.filter(({ isFor }) => isFor?.(here) ?? true).map(({ key, path }) => (
           <li key={key}>
             <ButtonLink look="quiet" className="-ms-2" to={path(here)}>
               {t(`star.way.${key}`)}

@@ -15,11 +15,11 @@ import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button, ButtonLink } from '#src/ui/button.js';
 import { Mast, Page } from '#src/ui/page.js';
-import { Board } from '#src/ui/surfaces.js';
+import { Board, Care } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { starTableQuery } from '../api/stars-queries.js';
 import { isJulian } from '#src/lib/civil-year.js';
-import { chooseRows, isGoodMarker } from '../model/star-choice.js';
+import { chooseRows, hasLightNights, isInShortList, ownFirst } from '../model/star-choice.js';
 import { ROWS_STEP, type SortKey } from '../model/star-list-query.js';
 import type { StarRow } from '../model/star-rows.js';
 import { NoPlace } from './no-place.js';
@@ -80,7 +80,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
     [stars, query.search, query.show, query.does],
   );
   const counts = useMemo(
-    () => (rows.length === 0 ? null : { good: rows.filter(isGoodMarker).length, all: rows.length }),
+    () => (rows.length === 0 ? null : { good: rows.filter(isInShortList).length, all: rows.length }),
     [rows],
   );
   const table = useTable({
@@ -90,7 +90,7 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
     getRowId: (star) => star.row.markerKey,
     state: { sorting: [{ id: query.sort, desc: query.descending }] },
   });
-  const sorted = table.getRowModel().rows;
+  const sorted = ownFirst(table.getRowModel().rows, (star) => star.original.row);
   const shown = sorted.slice(0, query.rows);
   const facts = useFacts(place, data);
   const isLate = isPlaceholderData || query.year !== settledYear;
@@ -126,6 +126,11 @@ function StarsOfPlace({ place, places, onPlace }: StarsOfPlaceProps) {
       </p>
       {error !== null && data !== undefined && <OldData updatedAt={dataUpdatedAt} refetch={refetch} />}
       {isJulian(query.year) && <p className="mb-3 text-small">{t('julian')}</p>}
+      {hasLightNights(rows) && (
+        <Care className="mb-4">
+          <p>{t('lightNightsHere')}</p>
+        </Care>
+      )}
       {data === undefined ? (
         <Board>
           {error === null ? (

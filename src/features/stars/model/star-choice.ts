@@ -12,10 +12,35 @@ export function isGoodMarker(row: MarkerRow): boolean {
   const rising = row.phenomena['heliacal-rising'];
   return (
     row.outcome === 'rises-and-sets' &&
-    (row.kind === 'figure' || row.vMag <= GOOD_MARKER_MAG) &&
+    (row.kind !== 'star' || row.vMag <= GOOD_MARKER_MAG) &&
     rising.outcome === 'dated' &&
     rising.occurrences.every((one) => !one.notes.includes('weak-marker')) &&
     !row.notes.some((note) => note === 'never-disappears' || note === 'lost-in-light-nights')
+  );
+}
+
+/** What the short list shows: good markers, and whatever the village itself has a name for. */
+export function isInShortList(row: MarkerRow): boolean {
+  return row.kind === 'own-figure' || isGoodMarker(row);
+}
+
+/** The village's own figures on top, whatever the order of the rest. */
+export function ownFirst<T>(rows: readonly T[], rowOf: (item: T) => MarkerRow): T[] {
+  const isOwn = (item: T) => rowOf(item).kind === 'own-figure';
+  return [...rows.filter(isOwn), ...rows.filter((item) => !isOwn(item))];
+}
+
+/** The brightest stars that never set tell it: where even they are lost for a while, the nights are too light. */
+const BRIGHTEST_MAG = 1;
+
+/** Are there nights at this place in which no star can be seen? */
+export function hasLightNights(rows: readonly MarkerRow[]): boolean {
+  return rows.some(
+    (row) =>
+      row.kind === 'star' &&
+      row.vMag < BRIGHTEST_MAG &&
+      row.outcome === 'never-sets' &&
+      row.strip.some(({ state }) => state === 'hidden'),
   );
 }
 
@@ -64,6 +89,6 @@ export function chooseRows(
   const isSearch = choice.search.trim() !== '';
   return rows.filter((row) => {
     if (isSearch) return fitsSearch(searchable(row), choice.search) && doesFit(row, choice.does);
-    return (choice.show === 'all' || isGoodMarker(row)) && doesFit(row, choice.does);
+    return (choice.show === 'all' || isInShortList(row)) && doesFit(row, choice.does);
   });
 }

@@ -2,7 +2,8 @@ import { plainWords } from './star-names.js';
 
 /** What of a star can be searched. */
 export interface Searchable {
-  hr: number;
+  /** Null for a patch of sky. */
+  hr: number | null;
   /** Names, designation, letter and constellation in words. */
   words: readonly string[];
 }
@@ -20,7 +21,7 @@ export function fitsSearch(star: Searchable, typed: string): boolean {
 function fitsWord(star: Searchable, word: string): boolean {
   if (word === 'hr') return true;
   if (/^\d+$/u.test(word)) {
-    const hr = String(star.hr);
+    const hr = String(star.hr ?? '');
     return hr === word || (word.length >= INFIX_LEAST && hr.startsWith(word)) || star.words.includes(word);
   }
   return star.words.some((own) => own.startsWith(word) || (word.length >= INFIX_LEAST && own.includes(word)));

@@ -16,6 +16,7 @@ const SAID_AS: Readonly<Record<string, Sentence['key']>> = {
   'place.thresholdSet': 'sentence.header.place.thresholds',
   'place.sameSideShiftDeg': 'sentence.header.place.thresholds',
   'place.oppositeSideShiftDeg': 'sentence.header.place.thresholds',
+  'place.figures': 'sentence.header.place.figures',
   'place.skylineRule': 'sentence.header.place.skylineRule',
   'place.latitudeDeg': 'sentence.header.place.where',
   'place.longitudeDeg': 'sentence.header.place.where',

@@ -13,6 +13,55 @@ describe('the door of the core', () => {
     expect(sky.computeMarkerYear('hr2491', site, settings, 2027)).toEqual(many[1]);
   });
 
+  it('gives a community’s own figure the dates of its indicator star', () => {
+    const site = siteAt(12, 39);
+    const figure = {
+      key: 'f-seed-bowl',
+      name: 'Seed bowl',
+      indicatorHr: 1457,
+      memberHrs: [1412, 1457],
+      patch: null,
+      thresholdOverride: null,
+    };
+    const own = sky.computeMarkerYear(figure.key, site, settings, 2027, [figure]);
+    const star = sky.computeMarkerYear('hr1457', site, settings, 2027);
+    expect(own).toEqual({ ...star, markerKey: figure.key });
+    expect(sky.yearStrip(own, site, settings, [figure])).toEqual(sky.yearStrip(star, site, settings));
+    expect(() => sky.computeMarkerYear(figure.key, site, settings, 2027)).toThrow(/f-seed-bowl/);
+  });
+
+  it('dates a patch of sky as a star at the same place that needs the same depth', () => {
+    // 18° deep on both sides at the place of Antares, whose motion is small; the place is that of J2000.
+    const site = siteAt(-14, -70);
+    const patch = {
+      rightAscensionDeg: 247.35167,
+      declinationDeg: -26.43194,
+      patchClass: 'full-night' as const,
+    };
+    const figure = {
+      key: 'f-dark',
+      name: '',
+      indicatorHr: null,
+      memberHrs: [],
+      patch,
+      thresholdOverride: null,
+    };
+    const year = sky.computeMarkerYear(figure.key, site, settings, 2027, [figure]);
+    const star = sky.depthAtCrossingYear({
+      hr: 6134,
+      latitudeDeg: -14,
+      longitudeDeg: -70,
+      year: 2027,
+      skylineDeg: 0,
+      thresholdsDeg: { sameSide: 18, oppositeSide: 18 },
+    });
+    for (const phenomenon of sky.PHENOMENA) {
+      const days = year.phenomena[phenomenon].occurrences.map((one) => one.expected.dayNumber);
+      expect(days, phenomenon).toEqual(star.dayNumbers?.[phenomenon]);
+    }
+    expect(year.basis.thresholdSource).toContain('astronomical twilight');
+  });
+
   it('gives the same answer twice, and the same after other years were asked', () => {
     const ask = () => sky.computeMarkerYear('hr5340', siteAt(45), settings, -431);
     const first = ask();

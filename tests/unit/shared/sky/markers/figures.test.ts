@@ -6,6 +6,7 @@ import { findStar } from '#shared/sky/stars/star-table.js';
 describe('figures', () => {
   it('are made of stars of the table and count their indicator among them', () => {
     for (const figure of FIGURES) {
+      expect(figure.patch).toBeNull();
       expect(figure.memberHrs).toContain(figure.indicatorHr);
       for (const hr of figure.memberHrs) expect(findStar(hr), `HR ${hr}`).not.toBeNull();
     }
@@ -14,12 +15,15 @@ describe('figures', () => {
   it('have the brightest member for an indicator', () => {
     for (const { memberHrs, indicatorHr } of FIGURES) {
       const brightest = Math.min(...memberHrs.map((hr) => findStar(hr)?.vMag ?? Infinity));
-      expect(findStar(indicatorHr)?.vMag).toBe(brightest);
+      expect(findStar(indicatorHr ?? 0)?.vMag).toBe(brightest);
     }
   });
 
   it('let the Pleiades behave like a star of the third class, and leave the belt to the place’s rule', () => {
-    expect(findFigure('pleiades')?.thresholdOverride).toEqual({ sameSideDeg: 16, oppositeSideDeg: 10 });
+    expect(findFigure('pleiades')?.thresholdOverride).toMatchObject({
+      sameSideDeg: 16,
+      oppositeSideDeg: 10,
+    });
     expect(findFigure('orion-belt')?.thresholdOverride).toBeNull();
     expect(findFigure('hr1165')).toBeNull();
   });

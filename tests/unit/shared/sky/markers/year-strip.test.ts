@@ -69,6 +69,22 @@ describe('the strip of a year', () => {
     expect(statesOf('hr2326', 45)).toEqual(['hidden']);
   });
 
+  it('hides even a star that never sets while no night is dark enough', () => {
+    const site = siteAt(66, 23);
+    const strip = yearStripOf(markerAt('hr7001', site, 2027));
+    expect(strip.map(({ state }) => state)).toEqual(['all-night', 'hidden', 'all-night']);
+    const { firstDay } = civilYearOf(2027);
+    const [before = 0, after = 0] = [strip[1]?.fromDayNumber, strip[1]?.toDayNumber].map(
+      (day) => (day ?? 0) - firstDay,
+    );
+    // Vega stands high at midnight in summer and shows with the Sun some 4° deep; the Sun is never that deep between
+    // early May and early August at 66° N (its depth at midnight is 24° less the declination).
+    expect(before).toBeGreaterThan(110);
+    expect(before).toBeLessThan(150);
+    expect(after).toBeGreaterThan(192);
+    expect(after).toBeLessThan(232);
+  });
+
   it('hides a star in nights that are too light for it', () => {
     // Altair at 66° N: between spring and late July the Sun hardly goes below the horizon.
     const strip = yearStripOf(markerAt('hr7557', siteAt(66), 2027));

@@ -83,7 +83,7 @@ describe('the table of stars', () => {
     const { user } = await open('/stars?show=all');
     await ready();
     expect(names()).toHaveLength(50);
-    expect(screen.getByText('Showing 50 of 833.')).toBeTruthy();
+    expect(screen.getByText('Showing 50 of 836.')).toBeTruthy();
     await user.click(screen.getByText('Show 50 more'));
     expect(names()).toHaveLength(100);
   });

@@ -1,6 +1,14 @@
 import { beforeAll, describe, expect, it } from 'vitest';
 import type { MarkerRow } from '#shared/contracts/stars.js';
-import { chooseRows, DOES, doesFit, isGoodMarker } from '#src/features/stars/model/star-choice.js';
+import {
+  chooseRows,
+  DOES,
+  doesFit,
+  hasLightNights,
+  isGoodMarker,
+  isInShortList,
+  ownFirst,
+} from '#src/features/stars/model/star-choice.js';
 import { noDates } from '#src/features/stars/model/row-outcome.js';
 import { starTable, TAZIMEL } from '#tests/support/stars-of-tazimel.js';
 
@@ -29,6 +37,23 @@ describe('a good marker at 12° north', () => {
       if (each.notes.includes('never-disappears')) expect(isGoodMarker(each)).toBe(false);
       if (each.kind === 'star' && each.vMag > 2.5) expect(isGoodMarker(each)).toBe(false);
     }
+  });
+});
+
+describe('light nights', () => {
+  it('are known at 66° north and not at 12° north', async () => {
+    const far = await starTable(2027, { ...TAZIMEL, latitudeDeg: 66, longitudeDeg: 23, skyline: [] });
+    expect(hasLightNights(far.items)).toBe(true);
+    expect(hasLightNights(rows)).toBe(false);
+  });
+});
+
+describe('a figure of the village', () => {
+  it('is in the short list even where it is no good marker, and stands on top of any order', () => {
+    const own: MarkerRow = { ...row('hr424'), markerKey: 'f-own', kind: 'own-figure' };
+    expect([isGoodMarker(own), isInShortList(own)]).toEqual([false, true]);
+    const order = ownFirst([row('pleiades'), own, row('hr2491')], (each) => each);
+    expect(order.map(({ markerKey }) => markerKey)).toEqual(['f-own', 'pleiades', 'hr2491']);
   });
 });
 

@@ -29,11 +29,13 @@ describe('what two versions rest on', () => {
       change('weatherContact'),
       change('place.name'),
       change('place.skyline'),
+      change('place.figures', null, []),
       change('engineVersion', '1.0.0', '1.1.0'),
       change('order'),
     ]);
     expect(reasons.map(({ key }) => key)).toEqual([
       'sentence.header.place.skyline',
+      'sentence.header.place.figures',
       'sentence.header.engineVersion',
     ]);
   });

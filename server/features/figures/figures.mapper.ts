@@ -1,0 +1,60 @@
+import type { Figure, FigureInput, FigureUse } from '#shared/contracts/figures.js';
+import type { SkyFigure } from '#shared/contracts/stars.js';
+import type { EntryEntity } from '../../db/entities/entry.entity.js';
+import type { FigureEntity } from '../../db/entities/figure.entity.js';
+
+const OWN_DEPTHS_SOURCE = 'depths that the village set for this figure';
+
+/** A figure's key among the markers; no built-in figure begins like it. */
+export function markerKeyOfFigure(figureId: string): string {
+  return `f-${figureId}`;
+}
+
+export function toFigure(row: FigureEntity, updatedByName: string): Figure {
+  return {
+    ...fromFigureInput(row),
+    id: row.id,
+    communityId: row.communityId,
+    markerKey: markerKeyOfFigure(row.id),
+    updatedBy: updatedByName,
+    updatedAt: row.updatedAt.toISOString(),
+    version: row.version,
+  };
+}
+
+/** The columns have the names of the fields; written out, so that nothing else ever passes. */
+export function fromFigureInput(input: FigureInput): FigureInput {
+  return {
+    names: input.names,
+    story: input.story,
+    variants: input.variants,
+    memberHrs: input.memberHrs,
+    indicatorHr: input.indicatorHr,
+    patch: input.patch,
+    ownDepths: input.ownDepths,
+    sharingLevel: input.sharingLevel,
+  };
+}
+
+/** What of a figure moves its dates, and the name under which the village knows it. */
+export function toSkyFigure(row: FigureEntity): SkyFigure {
+  return {
+    key: markerKeyOfFigure(row.id),
+    name: row.names[0]?.name ?? '',
+    indicatorHr: row.indicatorHr,
+    memberHrs: row.memberHrs,
+    patch: row.patch,
+    thresholdOverride: row.ownDepths && { ...row.ownDepths, source: OWN_DEPTHS_SOURCE },
+  };
+}
+
+/** @param entry with its calendar and that one's place */
+export function toFigureUse({ id, calendarId, calendar, content }: EntryEntity): FigureUse {
+  return {
+    calendarId,
+    entryId: id,
+    placeName: calendar.place.name,
+    year: calendar.year,
+    title: content.titleOfficer === '' ? content.titleVillage : content.titleOfficer,
+  };
+}

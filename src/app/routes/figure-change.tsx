@@ -1,0 +1,1 @@
+export { ChangeFigurePage as Component } from '#src/features/figures/components/figure-editor-pages.js';
