@@ -228,6 +228,7 @@ export const texts = {
     ways: 'More about it',
     way: {
       figure: 'Its story and its stars',
+      look: 'Where and when to look',
       drift: 'How it moved through the centuries',
       air: 'In clear and in hazy air',
     },

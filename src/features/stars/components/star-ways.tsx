@@ -11,7 +11,7 @@ interface Here {
 
 /** One way on from a star: its words are `stars:star.way.<key>`. */
 interface StarWay {
-  key: 'figure' | 'drift' | 'air';
+  key: 'figure' | 'look' | 'drift' | 'air';
   path: (here: Here) => string;
   /** Absent where it leads on from every star. */
   isFor?: (here: Here) => boolean;
@@ -27,6 +27,7 @@ const STAR_WAYS: readonly StarWay[] = [
     path: ({ markerKey }) => paths.figure(markerKey.slice(OWN_FIGURE.length)),
     isFor: ({ markerKey }) => markerKey.startsWith(OWN_FIGURE),
   },
+  { key: 'look', path: ({ markerKey, placeId }) => paths.look({ marker: markerKey, placeId }) },
   { key: 'drift', path: ({ markerKey, placeId, year }) => paths.drift(markerKey, { placeId, year }) },
   { key: 'air', path: ({ markerKey, placeId, year }) => paths.air(markerKey, { placeId, year }) },
 ];
