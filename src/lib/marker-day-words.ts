@@ -8,6 +8,8 @@ import { useDateWords } from './date-words.js';
 export interface MarkerDayWords {
   /** `About 7 June, between 3 and 12 June`. */
   about: (days: OccurrenceDays) => string;
+  /** The days of a year, or that there are none. */
+  occurrences: (days: readonly OccurrenceDays[], year: number) => string;
   /** The days of one phenomenon, or the plain sentence why there are none. */
   phenomenon: (row: Pick<MarkerRow, 'outcome' | 'phenomena'>, phenomenon: Phenomenon, year: number) => string;
 }
@@ -18,18 +20,22 @@ export function useMarkerDayWords(): MarkerDayWords {
   return useMemo(() => {
     const about = ({ expected, early, late }: OccurrenceDays) =>
       dates.aboutBetween(expected.gregorian, early?.gregorian ?? null, late?.gregorian ?? null);
+    const occurrences = (all: readonly OccurrenceDays[], year: number) => {
+      const [first, second, third] = all;
+      if (first && third) return t('marker.often', { count: all.length, first: about(first) });
+      if (first && second) return t('marker.twice', { first: about(first), second: about(second) });
+      return first ? about(first) : t('marker.notThisYear', { year });
+    };
     return {
       about,
+      occurrences,
       phenomenon: ({ outcome, phenomena }, phenomenon, year) => {
         if (outcome === 'never-sets') return t('marker.neverSets');
         if (outcome === 'never-clears-skyline') return t('marker.neverClears');
         const days = phenomena[phenomenon];
-        const [first, second] = days.occurrences;
-        if (first && second) return t('marker.twice', { first: about(first), second: about(second) });
-        if (first) return about(first);
         return days.outcome === 'never-dark-enough'
           ? t('marker.neverDark')
-          : t('marker.notThisYear', { year });
+          : occurrences(days.occurrences, year);
       },
     };
   }, [t, dates]);

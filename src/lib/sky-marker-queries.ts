@@ -11,3 +11,12 @@ export function skyMarkerQuery(placeId: string, year: number, spec: SkyMarkerSpe
       callApi(skyMarkersEndpoints.compute, { params: { placeId }, body: { year, spec }, signal }),
   });
 }
+
+/** Signs that make sense at a place, with their dates in a year. */
+export function skyMarkersQuery(placeId: string, year: number) {
+  return queryOptions({
+    queryKey: ['sky-markers', placeId, year, 'offered'],
+    queryFn: async ({ signal }) =>
+      (await callApi(skyMarkersEndpoints.list, { params: { placeId }, query: { year }, signal })).items,
+  });
+}

@@ -129,6 +129,23 @@ export const texts = {
     'crescent-not-seen': 'The young Moon is never seen here in this year: too low, or behind the skyline.',
     'star-gives-no-sign': 'The star has no such day here, so no Moon can be counted from it.',
   },
+  /** Why the range of such a sign is as wide as it is. */
+  signRange: {
+    'eye-direction':
+      'The eye judges a direction to two or three degrees, a day for each; haze does not move it.',
+    'eye-height': 'The eye judges a height to two or three degrees; haze does not move it.',
+    'sun-on-skyline':
+      'The day is computed to the hour; watched on the skyline, the Sun stands still for about ten days at a solstice.',
+    'sun-width': 'Air near the horizon, and where you stand, move the Sun by its own width.',
+    'noon-sun-edge': 'Air, snow and trees on the ridge move the Sun’s edge by half its width.',
+    shaft:
+      'A plumb line tells the overhead Sun to a tenth of a degree; near the tropics that is about five days.',
+    'moon-days':
+      'New and full Moon are computed to the minute; a first crescent shows an evening earlier or later.',
+    'moon-count': 'The star’s own range may take in another Moon.',
+    'venus-depth': 'Haze and eyes move the day on which Venus comes out of the Sun’s light or goes into it.',
+    'air-depth': 'Clear or hazy air makes a night darker or lighter, as one degree of the Sun’s depth does.',
+  },
   /** What a date of such a sign belongs to; stands before the date. */
   signTimeTitle: {
     morning: 'On the morning',

@@ -104,7 +104,7 @@ export function YearBoard(props: YearBoardProps) {
         {lanes.map((lane) => (
           <div key={lane.key} className="year-board-name" style={{ height: LANE_PITCH }}>
             {lane.icon}
-            <span>{lane.name}</span>
+            <span title={lane.name}>{lane.name}</span>
           </div>
         ))}
         <div className="text-umber-soft" style={{ paddingTop: BARS_GAP - 4 }}>

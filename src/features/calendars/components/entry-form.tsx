@@ -11,11 +11,11 @@ import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
 import type { Way } from '../model/warning-ways.js';
+import { ChooseLead } from './choose-lead.js';
 import { ElderRequests } from './elder-requests.js';
 import { EntryHeading } from './entry-heading.js';
 import { EntryTools } from './entry-tools.js';
 import { EntryWarnings } from './entry-warnings.js';
-import { MarkerDialog } from './marker-dialog.js';
 import { LateFields, SignsFields, WhoseFields } from './other-fields.js';
 import { StaleChoice } from './stale-choice.js';
 import { UnsavedLine } from './unsaved-line.js';
@@ -100,21 +100,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
           {t('editor.throwNewAway')}
         </Button>
       )}
-      <MarkerDialog
-        isOpen={isChoosing}
-        onClose={() => setIsChoosing(false)}
-        rows={editor.markers.data?.rows ?? []}
-        year={form.year}
-        phenomenon={form.draft.marker.phenomenon}
-        chosen={form.draft.marker.markerKey}
-        inUse={form.inUse}
-        onChoose={(markerKey) => {
-          form.change(({ marker }) => ({
-            leadType: 'marker',
-            marker: { ...marker, markerKey, occurrence: 1 },
-          }));
-        }}
-      />
+      <ChooseLead editor={editor} form={form} isOpen={isChoosing} onClose={() => setIsChoosing(false)} />
     </section>
   );
 }

@@ -8,11 +8,76 @@ import { markerName } from '#src/lib/marker-names.js';
 import { Dialog } from '#src/ui/dialog.js';
 import { TextField } from '#src/ui/field.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
+import { PickGroup } from '#src/ui/pick.js';
 import { findMarkers, SHOWN_MAX } from '../model/marker-search.js';
+import { SkyChoice, type SkyChoiceProps } from './sky-choice.js';
 
-interface MarkerDialogProps {
+interface MarkerDialogProps extends StarChoiceProps {
   isOpen: boolean;
   onClose: () => void;
+  /** On which side the dialog opens. */
+  side: DialogSide;
+  sky: Omit<SkyChoiceProps, 'year'>;
+}
+
+type DialogSide = 'stars' | 'sky';
+
+/** What an entry can go by: a star's first or last day, or a sign of the Sun, the nights and the stars. */
+export function MarkerDialog({ isOpen, onClose, side, sky, ...stars }: MarkerDialogProps) {
+  const { t } = useTranslation('calendars');
+  return (
+    <Dialog title={t('marker.title')} isOpen={isOpen} onClose={onClose}>
+      <BothSides
+        side={side}
+        sky={{
+          ...sky,
+          onChoose: (spec) => {
+            sky.onChoose(spec);
+            onClose();
+          },
+        }}
+        stars={{
+          ...stars,
+          onChoose: (markerKey) => {
+            stars.onChoose(markerKey);
+            onClose();
+          },
+        }}
+      />
+    </Dialog>
+  );
+}
+
+/** The dialog's content is made anew each time it opens, so it opens on the side that was asked for. */
+function BothSides({
+  side,
+  stars,
+  sky,
+}: {
+  side: DialogSide;
+  stars: StarChoiceProps;
+  sky: Omit<SkyChoiceProps, 'year'>;
+}) {
+  const { t } = useTranslation('calendars');
+  const [open, setOpen] = useState(side);
+  return (
+    <div className="grid gap-3">
+      <PickGroup
+        label={t('marker.sides')}
+        labelForEars
+        value={open}
+        onChange={setOpen}
+        options={[
+          { value: 'stars', label: t('marker.side.stars') },
+          { value: 'sky', label: t('marker.side.sky') },
+        ]}
+      />
+      {open === 'stars' ? <MarkerChoice {...stars} /> : <SkyChoice {...sky} year={stars.year} />}
+    </div>
+  );
+}
+
+interface StarChoiceProps {
   rows: readonly MarkerRow[];
   year: number;
   /** Its day is shown beside each star. */
@@ -23,16 +88,7 @@ interface MarkerDialogProps {
 }
 
 /** Stars and figures by name, each with the day that it would bring. */
-export function MarkerDialog(props: MarkerDialogProps) {
-  const { t } = useTranslation('calendars');
-  return (
-    <Dialog title={t('marker.title')} isOpen={props.isOpen} onClose={props.onClose}>
-      <MarkerChoice {...props} />
-    </Dialog>
-  );
-}
-
-function MarkerChoice({ rows, year, phenomenon, chosen, inUse, onChoose, onClose }: MarkerDialogProps) {
+function MarkerChoice({ rows, year, phenomenon, chosen, inUse, onChoose }: StarChoiceProps) {
   const { t } = useTranslation(['calendars', 'sky']);
   const [typed, setTyped] = useState('');
   const field = useRef<HTMLInputElement>(null);
@@ -70,7 +126,6 @@ function MarkerChoice({ rows, year, phenomenon, chosen, inUse, onChoose, onClose
               aria-pressed={row.markerKey === chosen}
               onClick={() => {
                 onChoose(row.markerKey);
-                onClose();
               }}
             >
               <span className="ring" aria-hidden />

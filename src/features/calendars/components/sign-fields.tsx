@@ -1,15 +1,44 @@
 import { Search } from 'lucide-react';
-import { useId } from 'react';
+import { useId, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { skySignIconKey } from '#shared/sheet/lead-icons.js';
+import type { SkyMarkerSpec } from '#shared/contracts/sky-markers.js';
+import { markerName } from '#src/lib/marker-names.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { Button } from '#src/ui/button.js';
 import { FieldNotes, SelectField } from '#src/ui/field.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
+import { ComboField, type ComboOption } from '#src/ui/combo-field.js';
 import { PickGroup } from '#src/ui/pick.js';
+import { Care } from '#src/ui/surfaces.js';
 import { hasSign } from '../model/entry-draft.js';
 import type { FormState } from '../model/form-state.js';
+import { findMarkers } from '../model/marker-search.js';
+import type { Markers } from '../model/preview-dates.js';
+import { SignParameters } from './sign-parameters.js';
+
+/** Kinds for which somebody may look towards the Sun. */
+const SUN_KINDS: ReadonlySet<SkyMarkerSpec['kind']> = new Set([
+  'sun-azimuth',
+  'noon-sun',
+  'zenith-sun',
+  'sun-season',
+]);
+
+/** Stars and figures to choose from, figures first, then the brighter before the fainter; null while on their way. */
+function useStarOptions(markers: Markers | null): ComboOption[] | null {
+  return useMemo(
+    () =>
+      markers &&
+      findMarkers([...markers.values()], '', new Set()).map((row) => ({
+        id: row.markerKey,
+        text:
+          row.designation === markerName(row) ? markerName(row) : `${markerName(row)}, ${row.designation}`,
+      })),
+    [markers],
+  );
+}
 
 /** The sign of the sky that leads, and which of its two days where a year has two. */
 export function SignFields({ form, onSearch }: { form: FormState; onSearch: () => void }) {
@@ -21,6 +50,10 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
   const { sky } = draft;
   const problem = at('lead.spec.markerKey') ?? at('lead.spec');
   const occurrences = form.sign?.occurrences ?? [];
+  const setSpec = (spec: SkyMarkerSpec) => {
+    change({ sky: { spec, occurrence: 1 } });
+  };
+  const starOptions = useStarOptions(form.markers);
   return (
     <div className="grid gap-4">
       <div role="group" aria-labelledby={labelId}>
@@ -44,6 +77,29 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
         </div>
         <FieldNotes inputId={labelId} problem={problem} />
       </div>
+      {starOptions !== null && 'markerKey' in sky.spec && (
+        <ComboField
+          label={t('sign.star')}
+          options={starOptions}
+          value={sky.spec.markerKey === '' ? null : sky.spec.markerKey}
+          problem={at('lead.spec.markerKey')}
+          onChange={(markerKey) => {
+            if (markerKey !== null && 'markerKey' in sky.spec) setSpec({ ...sky.spec, markerKey });
+          }}
+        />
+      )}
+      {hasSign(sky) && (
+        <SignParameters spec={sky.spec} at={(parameter) => at(`lead.spec.${parameter}`)} onChange={setSpec} />
+      )}
+      {form.sign !== null && form.sign.reason !== null && <p>{t(`sky:noSign.${form.sign.reason}`)}</p>}
+      {form.sign?.outcome === 'dated' && (
+        <p className="text-small text-umber-soft">{t(`sky:signRange.${form.sign.basis.range as 'shaft'}`)}</p>
+      )}
+      {SUN_KINDS.has(sky.spec.kind) && (
+        <Care>
+          <p>{t('sign.sunCaution')}</p>
+        </Care>
+      )}
       {sky.spec.kind === 'moon-phase' && (
         <SelectField
           label={t('form.occurrences', { year })}

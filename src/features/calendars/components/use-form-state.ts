@@ -20,6 +20,7 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
   return {
     calendarId: calendar.id,
     entryId: selected.id,
+    placeId: calendar.placeId,
     draft,
     content: selected.content,
     dates: selected.dates,
@@ -31,7 +32,6 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
       const problem = problems.get(field);
       return problem && words.field(problem.code, problem.message);
     },
-    placeId: calendar.placeId,
     markers: markers.data?.byKey ?? null,
     sign: draft.leadType === 'sky' ? signOf(signs, draft.sky.spec) : null,
     inUse,

@@ -28,9 +28,7 @@ export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () =
         }}
         options={[
           { value: 'marker', label: t('form.byMarker'), note: t('form.byMarkerNote') },
-          ...(draft.leadType === 'sky'
-            ? [{ value: 'sky' as const, label: t('form.bySign'), note: t('form.bySignNote') }]
-            : []),
+          { value: 'sky', label: t('form.bySign'), note: t('form.bySignNote') },
           { value: 'fixed-date', label: t('form.byDate'), note: t('form.byDateNote') },
         ]}
       />

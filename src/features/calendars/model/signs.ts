@@ -9,7 +9,20 @@ export type Signs = ReadonlyMap<string, SkyMarkerYear>;
 
 /** The year of a sign, or null while it is on its way or cannot be asked for yet. */
 export function signOf(signs: Signs, spec: SkyMarkerSpec): SkyMarkerYear | null {
-  return signs.get(canonicalJson(spec)) ?? null;
+  const found = signs.get(canonicalJson(withoutName(spec)));
+  return found ? { ...found, spec } : null;
+}
+
+/** What a point or a ridge is called moves no date: a name is typed without asking for the days at each letter. */
+function withoutName(spec: SkyMarkerSpec): SkyMarkerSpec {
+  switch (spec.kind) {
+    case 'sun-azimuth':
+      return { ...spec, pointName: '' };
+    case 'noon-sun':
+      return { ...spec, ridgeName: '' };
+    default:
+      return spec;
+  }
 }
 
 /** The specs that contents go by and that can be asked for, each once. */
@@ -17,7 +30,8 @@ export function specsOf(contents: readonly Pick<EntryInput, 'lead'>[]): SkyMarke
   const found = new Map<string, SkyMarkerSpec>();
   for (const { lead } of contents) {
     if (lead.type !== 'sky' || !skyMarkerSpec.safeParse(lead.spec).success) continue;
-    found.set(canonicalJson(lead.spec), lead.spec);
+    const asked = withoutName(lead.spec);
+    found.set(canonicalJson(asked), asked);
   }
   return [...found.values()];
 }

@@ -34,6 +34,22 @@ describe('unsaved entries on this device', () => {
     expect(readEdits('beyno', 'c1').size).toBe(0);
   });
 
+  it('keep a sign of the sky with all that was set about it, and nothing that is no sign', () => {
+    const spec = {
+      kind: 'sun-azimuth',
+      event: 'sunrise',
+      azimuthDeg: 112.5,
+      pointName: 'the notch',
+    } as const;
+    const led = { ...edit, draft: { ...edit.draft, leadType: 'sky', sky: { spec, occurrence: 2 } } as const };
+    keepEdit('beyno', 'c1', 'e1', led);
+    keep(`${draftPrefix('beyno')}entry.c1.e2`, {
+      ...led,
+      draft: { ...led.draft, sky: { spec: { kind: 'comet' }, occurrence: 1 } },
+    });
+    expect([...readEdits('beyno', 'c1')]).toEqual([['e1', led]]);
+  });
+
   it('of another shape are left alone, not half read', () => {
     const { giver: _giver, ...older } = edit.draft;
     keep(`${draftPrefix('beyno')}entry.c1.e1`, { ...edit, draft: older });
