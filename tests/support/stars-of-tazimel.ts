@@ -1,6 +1,5 @@
 import { AirService } from '#server/features/air/air.service.js';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
-import type { PlacesService } from '#server/features/places/places.service.js';
 import { SkyYearsService } from '#server/features/stars/sky-years.service.js';
 import { SkylineEffectsService } from '#server/features/stars/skyline-effects.service.js';
 import { StarsService, type StarTable } from '#server/features/stars/stars.service.js';
@@ -8,6 +7,7 @@ import type { AirAnswer } from '#shared/contracts/air.js';
 import type { Place } from '#shared/contracts/places.js';
 import type { MarkerDetail, SkylineEffect } from '#shared/contracts/stars.js';
 import { OFFICER } from './on-board.js';
+import { watchedPlaces } from './watched-places.js';
 
 /** The demo's place with ids of its own, and what the server answers for it: computed, never written down. */
 export const TAZIMEL: Place = {
@@ -20,8 +20,7 @@ export const TAZIMEL: Place = {
 const skyYears = new SkyYearsService();
 
 function starsOf(place: Place): StarsService {
-  const places = { watched: () => Promise.resolve({ ...place, figures: [] }) };
-  return new StarsService(places as unknown as PlacesService, skyYears);
+  return new StarsService(watchedPlaces(place), skyYears);
 }
 
 export function starTable(year: number, place: Place = TAZIMEL): Promise<StarTable> {
@@ -37,7 +36,6 @@ export function skylineEffects(year: number, place: Place = TAZIMEL): SkylineEff
 }
 
 export function starAir(markerKey: string, year: number, place: Place = TAZIMEL): Promise<AirAnswer> {
-  const places = { read: () => Promise.resolve(place) };
-  const service = new AirService(places as unknown as PlacesService, skyYears);
+  const service = new AirService(watchedPlaces(place), skyYears);
   return service.read(undefined as never, place.id, markerKey, year);
 }

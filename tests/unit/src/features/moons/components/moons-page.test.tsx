@@ -7,6 +7,7 @@ import { MoonsPage } from '#src/features/moons/components/moons-page.js';
 import { answerWith, type Sent } from '#tests/support/answers.js';
 import { renderOnBoard } from '#tests/support/on-board.js';
 import { TAZIMEL } from '#tests/support/stars-of-tazimel.js';
+import { watchedPlaces } from '#tests/support/watched-places.js';
 
 // Real Moons of real years: quick by themselves, slow on a busy machine.
 vi.setConfig({ testTimeout: 20_000 });
@@ -19,7 +20,7 @@ afterEach(() => {
   vi.unstubAllGlobals();
 });
 
-const service = new MoonsService({ read: () => Promise.resolve(TAZIMEL) } as never, new SkyYearsService());
+const service = new MoonsService(watchedPlaces(TAZIMEL), new SkyYearsService());
 const tableFor = (search: URLSearchParams): Promise<MoonTable> =>
   service.read({} as never, TAZIMEL.id, moonQuestion.parse(Object.fromEntries(search)));
 
