@@ -1,7 +1,6 @@
 import type { MarkerAtPlace } from '../markers/place-year.js';
 import type { Site } from '../types.js';
 import { monthOfDay } from '../time/civil-year.js';
-import { airAtPlace } from '../visibility/air.js';
 import { clarityOfMonth } from '../visibility/clarity.js';
 import { lookPathOf, type LookPath } from './look-path.js';
 import type { LookOutcome, WatchSide } from '../vocabulary.js';
@@ -9,7 +8,7 @@ import type { Look } from './look-types.js';
 import { moonThen } from './moon-then.js';
 import { planetsBeside, type StarThen } from './planets-beside.js';
 import { pointersOf } from './pointers.js';
-import { type Seeing, sightOf } from './sight-rule.js';
+import type { SightRule } from './sight-rule.js';
 import { skyAt } from './sky-at.js';
 import { watchWindowOf, type WatchWindow } from './watch-window.js';
 
@@ -20,15 +19,16 @@ import { watchWindowOf, type WatchWindow } from './watch-window.js';
  */
 export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, side: WatchSide): Look {
   const { year, ground, settings, clock } = marker;
-  const month = monthOfDay(dayNumber, year.civil.calendar);
-  const clarity = clarityOfMonth(settings.clarityByMonth, month);
-  const air = airAtPlace(site, month, clarity);
-  const { thresholdSet, sameSideShiftDeg } = settings;
-  const seeing: Seeing = { air, clarity, thresholdSet, sameSideShiftDeg };
-  const sight = sightOf(seeing, marker.marker.vMag, marker.marker.override);
+  const clarity = clarityOfMonth(settings.clarityByMonth, monthOfDay(dayNumber, year.civil.calendar));
+  const rule: SightRule = {
+    threshold: marker.threshold,
+    sameSideShiftDeg: settings.sameSideShiftDeg,
+    oppositeSideShiftDeg: settings.oppositeSideShiftDeg,
+    clarity,
+  };
   const meanNoonJdUt = dayNumber - site.longitudeDeg / 360;
   const window = watchWindowOf(year, ground, dayNumber - clock.offsetDays(meanNoonJdUt), side);
-  const path = window.span === null ? null : lookPathOf(marker, sight, window.span);
+  const path = window.span === null ? null : lookPathOf(marker, rule, window.span);
   const middleJdUt = window.span === null ? meanNoonJdUt : (window.span.fromJdUt + window.span.toJdUt) / 2;
   const bestJdUt = path?.best?.jdUt ?? null;
   const then = bestJdUt === null ? null : thenOf(marker, bestJdUt);
@@ -49,7 +49,7 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
     seenToJdUt: path?.seen?.toJdUt ?? null,
     best: path?.best ?? null,
     path: path?.moments ?? [],
-    pointers: then === null ? [] : pointersOf(marker, seeing, then.sky, then.star),
+    pointers: then === null ? [] : pointersOf(marker, rule, then.sky, then.star),
     planets:
       then === null || path === null
         ? []
@@ -57,11 +57,7 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
     moon:
       window.span === null
         ? null
-        : moonThen(
-            site,
-            then?.sky ?? skyAt(year, ground, middleJdUt),
-            then === null ? null : { star: then.star, sight, air },
-          ),
+        : moonThen(site, then?.sky ?? skyAt(year, ground, middleJdUt), then?.star ?? null),
   };
 }
 

@@ -1,9 +1,8 @@
-import type { HorizontalPlace } from '../horizon/horizontal.js';
 import type { MarkerAtPlace } from '../markers/place-year.js';
 import { DEG_PER_RAD } from '../units/angle.js';
 import type { LookMoment } from './look-types.js';
-import type { Sight, SightMoment } from './sight-rule.js';
-import { skyAt, type SkyAt } from './sky-at.js';
+import { isSeen, neededForSightDeg, type SightRule } from './sight-rule.js';
+import { skyAt } from './sky-at.js';
 
 /** A star's way through one watch. */
 export interface LookPath {
@@ -15,32 +14,18 @@ export interface LookPath {
   best: LookMoment | null;
 }
 
-interface ScannedMoment extends LookMoment {
-  spareMag: number;
-}
-
 const SCAN_DAYS = 1 / 1440;
 /** Moments further apart are enough for a picture and a table. */
 const KEPT_EVERY = 5;
 const PRECISION_DAYS = 1 / 86_400;
 
-/** A star at one moment as its sight asks for it; without the Moon. */
-export function sightMoment(sky: SkyAt, at: HorizontalPlace, moonNl = 0): SightMoment {
-  return {
-    altitudeDeg: at.altitudeRad * DEG_PER_RAD,
-    sunAltitudeDeg: -sky.sunDepressionDeg,
-    azimuthDifferenceDeg: (at.azimuthRad - sky.sunAzimuthRad) * DEG_PER_RAD,
-    moonNl,
-  };
-}
-
 /** @param span stretch of time, JD UT */
 export function lookPathOf(
   marker: MarkerAtPlace,
-  sight: Sight,
+  rule: SightRule,
   span: { fromJdUt: number; toJdUt: number },
 ): LookPath {
-  const momentAt = (jdUt: number): ScannedMoment => momentOf(marker, sight, jdUt);
+  const momentAt = (jdUt: number): LookMoment => momentOf(marker, rule, jdUt);
   const count = Math.max(1, Math.ceil((span.toJdUt - span.fromJdUt) / SCAN_DAYS));
   const scanned = Array.from({ length: count + 1 }, (_, index) =>
     momentAt(span.fromJdUt + ((span.toJdUt - span.fromJdUt) * index) / count),
@@ -48,7 +33,7 @@ export function lookPathOf(
   const seen = seenSpan(scanned, momentAt);
   const middle = seen === null ? null : momentAt((seen.fromJdUt + seen.toJdUt) / 2);
   // A hill may stand in the middle of what is seen.
-  const best = middle?.isUp === true ? middle : leastMissing(scanned);
+  const best = middle?.isUp === true ? middle : leastMissing(marker, rule, scanned);
   const named = [seen?.fromJdUt, seen?.toJdUt].flatMap((jdUt) =>
     jdUt === undefined ? [] : [momentAt(jdUt)],
   );
@@ -56,15 +41,15 @@ export function lookPathOf(
   const moments = [...kept, ...named, ...(best === null ? [] : [best])]
     .sort((a, b) => a.jdUt - b.jdUt)
     .filter(({ jdUt }, index, all) => jdUt !== all[index - 1]?.jdUt);
-  return { moments: moments.map(bare), seen, best: best && bare(best) };
+  return { moments, seen, best };
 }
 
-function momentOf(marker: MarkerAtPlace, sight: Sight, jdUt: number): ScannedMoment {
+function momentOf(marker: MarkerAtPlace, rule: SightRule, jdUt: number): LookMoment {
   const sky = skyAt(marker.year, marker.ground, jdUt);
   const star = sky.starAt(marker.year.stars.placeOf(marker.marker.starRef));
   const above = sky.aboveSkylineRad(star);
+  const sunward = star.azimuthRad - sky.sunAzimuthRad;
   const isUp = above >= 0;
-  const spareMag = sight.spareMag(sightMoment(sky, star));
   return {
     jdUt,
     azimuthDeg: star.azimuthRad * DEG_PER_RAD,
@@ -72,13 +57,8 @@ function momentOf(marker: MarkerAtPlace, sight: Sight, jdUt: number): ScannedMom
     aboveSkylineDeg: above * DEG_PER_RAD,
     sunDepressionDeg: sky.sunDepressionDeg,
     isUp,
-    isSeen: isUp && spareMag >= 0,
-    spareMag,
+    isSeen: isUp && isSeen(rule, marker.marker.vMag, star.altitudeRad, sunward, sky.sunDepressionDeg),
   };
-}
-
-function bare({ spareMag: _spareMag, ...moment }: ScannedMoment): LookMoment {
-  return moment;
 }
 
 /** Ends to the second, always on the seen side. */
@@ -102,11 +82,23 @@ function seenSpan(scanned: readonly LookMoment[], momentAt: (jdUt: number) => Lo
   };
 }
 
-/** The moment over the skyline at which the star comes nearest to showing. */
-function leastMissing(scanned: readonly ScannedMoment[]): ScannedMoment | null {
-  let best: ScannedMoment | null = null;
+/** The moment over the skyline at which the Sun comes nearest to the depth that is needed. */
+function leastMissing(
+  marker: MarkerAtPlace,
+  rule: SightRule,
+  scanned: readonly LookMoment[],
+): LookMoment | null {
+  let best: LookMoment | null = null;
+  let bestMargin = Number.NEGATIVE_INFINITY;
   for (const moment of scanned) {
-    if (moment.isUp && (best === null || moment.spareMag > best.spareMag)) best = moment;
+    if (!moment.isUp) continue;
+    const sky = skyAt(marker.year, marker.ground, moment.jdUt);
+    const sunward = moment.azimuthDeg / DEG_PER_RAD - sky.sunAzimuthRad;
+    const needed = neededForSightDeg(rule, marker.marker.vMag, moment.altitudeDeg, sunward);
+    const margin = moment.sunDepressionDeg - needed;
+    if (margin <= bestMargin) continue;
+    best = moment;
+    bestMargin = margin;
   }
   return best;
 }

@@ -3,10 +3,10 @@ import type { MarkerAtPlace } from '../markers/place-year.js';
 import { STARS } from '../stars/star-table.js';
 import type { Star } from '../types.js';
 import { DEG_PER_RAD } from '../units/angle.js';
+import { thresholdOf } from '../visibility/threshold-sets.js';
 import { bearingRad, separationRad } from './direction.js';
 import type { Pointer } from './look-types.js';
-import { sightMoment } from './look-path.js';
-import { type Seeing, sightOf } from './sight-rule.js';
+import { isSeen, type SightRule } from './sight-rule.js';
 import type { SkyAt } from './sky-at.js';
 
 /** Two and a half hands: as far as an arm's length of hands is walked without losing the way. */
@@ -25,7 +25,7 @@ const MOST = 3;
  */
 export function pointersOf(
   marker: MarkerAtPlace,
-  seeing: Seeing,
+  rule: SightRule,
   sky: SkyAt,
   star: HorizontalPlace,
 ): Pointer[] {
@@ -38,7 +38,13 @@ export function pointersOf(
       pointer.separationDeg >= TOO_CLOSE_DEG &&
       pointer.separationDeg <= (each.vMag <= VERY_BRIGHT_MAG ? FAR_DEG : NEAR_DEG) &&
       pointer.aboveSkylineDeg >= 0 &&
-      sightOf(seeing, each.vMag, null).spareMag(sightMoment(sky, at)) >= 0;
+      isSeen(
+        ruleFor(marker, rule, each),
+        each.vMag,
+        at.altitudeRad,
+        at.azimuthRad - sky.sunAzimuthRad,
+        sky.sunDepressionDeg,
+      );
     return isUseful ? [pointer] : [];
   });
   const near = seen.filter(({ separationDeg }) => separationDeg <= NEAR_DEG);
@@ -48,6 +54,10 @@ export function pointersOf(
 
 function isNamed({ name, bayer, flamsteed, constellation }: Star): boolean {
   return name !== `${bayer === '' ? flamsteed : bayer} ${constellation}`;
+}
+
+function ruleFor(marker: MarkerAtPlace, rule: SightRule, star: Star): SightRule {
+  return { ...rule, threshold: thresholdOf(marker.settings.thresholdSet, star.vMag, null) };
 }
 
 function pointerOf(star: Star, at: HorizontalPlace, marker: HorizontalPlace, sky: SkyAt): Pointer {

@@ -1,63 +1,58 @@
-import type { Air } from '../visibility/air.js';
+import { DEG_PER_RAD, wrapPi } from '../units/angle.js';
 import { CLARITY_SHIFT_DEG } from '../visibility/clarity.js';
-import { faintestStarMag } from '../visibility/faintest-star.js';
-import { AZIMUTH_DIFFERENCE_DEG } from '../visibility/model-depths.js';
-import { type DepthPair, thresholdOf } from '../visibility/threshold-sets.js';
-import type { Clarity, ThresholdSetId } from '../vocabulary.js';
+import { neededDepthDeg } from '../visibility/needed-depth.js';
+import type { Threshold } from '../visibility/threshold-sets.js';
+import type { Clarity } from '../vocabulary.js';
+import { extinctionAngleDeg } from './extinction-angle.js';
 
-/** What a place and its air ask before a star shows. */
-export interface Seeing {
-  air: Air;
-  clarity: Clarity;
-  thresholdSet: ThresholdSetId;
+/** What a place asks of the sky before a star of some brightness can be seen. */
+export interface SightRule {
+  threshold: Threshold;
   sameSideShiftDeg: number;
+  oppositeSideShiftDeg: number;
+  clarity: Clarity;
 }
 
-/** A star's chances at one moment. Angles in degrees, without refraction. */
-export interface SightMoment {
-  altitudeDeg: number;
-  sunAltitudeDeg: number;
-  /** Between star and Sun. */
-  azimuthDifferenceDeg: number;
-  /** Light of the Moon there, nanolamberts. */
-  moonNl: number;
-}
-
-/** Tells of one star whether it shows. */
-export interface Sight {
-  /** Magnitudes to spare; the star shows from 0 up. −Infinity below the mathematical horizon. */
-  spareMag(moment: SightMoment): number;
-}
-
-/** Stars are seen best below this altitude when they move along with the Sun. */
-const BEST_BELOW_DEG = 20;
-const STEP_DEG = 0.25;
+/** A star this high has left the thick air behind: the far half of the sky is then never the lighter one. */
+const HIGH_DEG = 10;
 
 /**
- * The model of visibility says how light, air and altitude play together; the place's own rule says how much the eyes there
- * need. Both are joined by one offset in magnitudes: over flat ground a star that moves along with the Sun just shows, at its
- * best altitude, when the two stand apart by the rule's arcus visionis. So a watch agrees with the dates.
- * @param override depths that replace those of the magnitude, for figures
+ * The depth of the Sun that is needed at one moment: the rule of the dates, applied to the star's own altitude in place
+ * of the skyline's, because a star that stands higher is seen in a lighter sky.
+ * @param vMag of the star; it decides what a degree of altitude is worth
+ * @param altitudeDeg true altitude of the star
+ * @param sunwardRad difference in azimuth between star and Sun
  */
-export function sightOf(seeing: Seeing, vMag: number, override: DepthPair | null): Sight {
-  const { air, clarity, thresholdSet, sameSideShiftDeg } = seeing;
-  const { sameSideDeg } = thresholdOf(thresholdSet, vMag, override);
-  const apartDeg = Math.max(0, sameSideDeg + sameSideShiftDeg + CLARITY_SHIFT_DEG[clarity]);
-  const neededMag = faintestMovingAlong(air, apartDeg);
-  return { spareMag: (moment) => faintestStarMag(air, moment) - neededMag };
+export function neededForSightDeg(
+  rule: SightRule,
+  vMag: number,
+  altitudeDeg: number,
+  sunwardRad: number,
+): number {
+  const { sameSideDeg, oppositeSideDeg, followsAzimuth } = rule.threshold;
+  const airDeg = CLARITY_SHIFT_DEG[rule.clarity];
+  const toward = Math.cos(wrapPi(sunwardRad));
+  const view = { vMag, clarity: rule.clarity, flatOppositeDeg: oppositeSideDeg + airDeg };
+  const near = (thresholdDeg: number): number => {
+    const inAirDeg = thresholdDeg + rule.sameSideShiftDeg + airDeg;
+    return neededDepthDeg('altitude-difference', 'same', inAirDeg, altitudeDeg, view);
+  };
+  if (followsAzimuth)
+    return near((sameSideDeg + oppositeSideDeg) / 2 + ((sameSideDeg - oppositeSideDeg) / 2) * toward);
+  if (toward >= 0) return near(sameSideDeg);
+  const far = Math.max(0, oppositeSideDeg + rule.oppositeSideShiftDeg + airDeg);
+  return altitudeDeg > HIGH_DEG ? Math.min(far, near(sameSideDeg)) : far;
 }
 
-/** Faintest star that the model lets show on flat ground, at any altitude, so many degrees above the Sun. */
-function faintestMovingAlong(air: Air, apartDeg: number): number {
-  let faintest = Number.NEGATIVE_INFINITY;
-  for (let altitudeDeg = 0; altitudeDeg <= BEST_BELOW_DEG; altitudeDeg += STEP_DEG) {
-    const here = faintestStarMag(air, {
-      altitudeDeg,
-      sunAltitudeDeg: altitudeDeg - apartDeg,
-      azimuthDifferenceDeg: AZIMUTH_DIFFERENCE_DEG.same,
-      moonNl: 0,
-    });
-    faintest = Math.max(faintest, here);
-  }
-  return faintest;
+/** Is a star that stands over the skyline seen? Above the thick air, in a sky that is dark enough for it. */
+export function isSeen(
+  rule: SightRule,
+  vMag: number,
+  altitudeRad: number,
+  sunwardRad: number,
+  sunDepressionDeg: number,
+): boolean {
+  const altitudeDeg = altitudeRad * DEG_PER_RAD;
+  if (altitudeDeg < extinctionAngleDeg(vMag, rule.clarity)) return false;
+  return sunDepressionDeg >= neededForSightDeg(rule, vMag, altitudeDeg, sunwardRad);
 }

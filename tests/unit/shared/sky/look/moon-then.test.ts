@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 
-import { moonPhases, whereToLook } from '#shared/sky/index.js';
+import { moonPhases } from '#shared/sky/index.js';
 import { skyAt } from '#shared/sky/look/sky-at.js';
 import { moonlightOf, moonShapeOf, moonThen } from '#shared/sky/look/moon-then.js';
-import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
+import { siteAt } from '#tests/support/sky/builders.js';
 import { markerAt } from '#tests/support/sky/marker.js';
 
 describe('the Moon’s shape', () => {
@@ -34,27 +34,21 @@ describe('the Moon’s shape', () => {
 });
 
 describe('moonlight', () => {
-  it('has three words by what it takes from the view, in magnitudes', () => {
-    expect([0, 0.1, 0.2, 0.5, 0.7, 2].map(moonlightOf)).toEqual([
-      'none',
-      'none',
-      'some',
-      'some',
-      'strong',
-      'strong',
-    ]);
+  it('is none while the Moon is thin or not up', () => {
+    expect(moonlightOf(false, 1, 10)).toBe('none');
+    expect(moonlightOf(true, 0.05, 3)).toBe('none');
   });
 
-  it('is none from a Moon that is down or thin, and something from a nearly full one beside the star', () => {
-    const look = (dayOfYear: number) => {
-      const moment = whereToLook('pleiades', siteAt(12, 39), settingsWith(), 2_461_406 + dayOfYear, 'dawn');
-      return moment.moon;
-    };
-    // 10 June 2027: a crescent below the ground. 17 October: two days after full Moon, beside the Pleiades.
-    expect(look(161)).toMatchObject({ isUp: false, moonlight: 'none' });
-    const beside = look(290);
-    expect(beside?.separationDeg).toBeLessThan(25);
-    expect(beside?.litShare).toBeGreaterThan(0.85);
-    expect(beside?.moonlight).not.toBe('none');
+  it('grows with the lit share and with nearness, and never the other way', () => {
+    const order = ['none', 'some', 'strong'];
+    for (const separation of [5, 20, 60, 120]) {
+      let before = 0;
+      for (let lit = 0; lit <= 1; lit += 0.05) {
+        const now = order.indexOf(moonlightOf(true, lit, separation));
+        expect(now).toBeGreaterThanOrEqual(before);
+        expect(now).toBeLessThanOrEqual(order.indexOf(moonlightOf(true, lit, separation / 2)));
+        before = now;
+      }
+    }
   });
 });
