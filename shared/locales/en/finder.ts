@@ -175,7 +175,7 @@ export const texts = {
     after_one: 'The next sign after: {{sign}}. {{day}}, {{count}} day after your day.',
     after_other: 'The next sign after: {{sign}}. {{day}}, {{count}} days after your day.',
     use: 'Count the days from it',
-    sun: 'The Sun itself: where it comes up or goes down on your skyline moves fastest in spring and autumn, and turns at the solstices. Mark the spot and write it in the entry under “Signs”.',
+    sun: 'The Sun itself: where it comes up or goes down on your skyline moves fastest in spring and autumn, and turns at the solstices. Solstices, equinoxes, the first dark night and the Moons serve as well: in the entry, choose them under “Sun and sky”.',
     land: 'Signs of the land: birds that arrive, buds, ice, first rain. Write them in the entry under “Signs”; two together are better than one.',
     fixed: 'A fixed date of the responsible office, where there is one.',
     tryAll: 'Look through the faint stars too',
