@@ -3,7 +3,8 @@ import { id, isoDate } from './common.js';
 import { entryIcon, entryWindow } from './calendars.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
-import { markerNames, occurrenceDetail, phenomenon } from './stars.js';
+import { skyMarkerSpec } from './sky-markers.js';
+import { markerNames, occurrenceDays, occurrenceDetail, phenomenon } from './stars.js';
 import { CLARITIES } from '../sky/vocabulary.js';
 
 export const comingMarker = z.strictObject({
@@ -16,6 +17,17 @@ export const comingMarker = z.strictObject({
   leads: z.array(z.string()),
 });
 export type ComingMarker = z.infer<typeof comingMarker>;
+
+/** A sign beyond a star's first and last days that a published entry goes by. */
+export const comingSign = z.strictObject({
+  spec: skyMarkerSpec,
+  /** The star or figure of the sign, if it has one. */
+  marker: markerNames.nullable(),
+  occurrence: occurrenceDays,
+  daysAway: z.number().int(),
+  leads: z.array(z.string()),
+});
+export type ComingSign = z.infer<typeof comingSign>;
 
 export const openWindow = z.strictObject({
   calendarId: id,
@@ -71,6 +83,7 @@ export const today = z.strictObject({
   /** Markers to look for in the next days: range open now, or expected within `days`; else the next ones. */
   coming: z.array(comingMarker),
   comingIsLater: z.boolean(),
+  comingSigns: z.array(comingSign),
   openWindows: z.array(openWindow),
   waiting: z.array(waitingItem),
 });

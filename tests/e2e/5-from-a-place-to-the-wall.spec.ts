@@ -140,7 +140,7 @@ async function makePlace(page: Page): Promise<void> {
   await page.getByText('Paste or load a table instead').click();
   const table = page.getByLabel('Skyline table');
   await table.fill('0, 1\n90, high\n180, 2\n360, 1');
-  await expect(page.getByText(/high/).last()).toBeVisible();
+  await expect(page.getByText(/“high”/)).toBeVisible();
   await table.fill('0, 1\n90, 4\n180, 2\n270, 1.5\n360, 1');
   await page.getByRole('button', { name: 'Use this table' }).click();
   await page.getByRole('button', { name: 'Save the place' }).click();

@@ -11,6 +11,7 @@ import { civilDateAt } from '../places/place-day.service.js';
 import type { PlacesService } from '../places/places.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import type { ComingMarkersService, PublishedCalendar } from './coming-markers.service.js';
+import { comingSigns } from './coming-signs.service.js';
 import type { WaitingService } from './waiting.service.js';
 
 export interface TodayParts {
@@ -49,6 +50,7 @@ export class TodayService {
       clarity: place?.clarityByMonth[month - 1] ?? null,
       coming: markers.items,
       comingIsLater: markers.isLater,
+      comingSigns: comingSigns(published, date),
       openWindows: published.flatMap((calendar) => openWindows(calendar, date)).sort(byLastDay),
       waiting: await waiting.of(actor, all, year),
     };
