@@ -123,7 +123,8 @@ async function agreesAndSigns(browser: Browser, mailbox: string, calendar: strin
   const answers = page.getByRole('group', { name: 'Your answer' });
   for (const { title } of WORK) {
     await expect(page.getByRole('heading', { level: 1 })).toContainText(title);
-    await answers.getByRole('button', { name: 'Agree' }).click();
+    // Nothing may lie over the answers, however quickly somebody goes on.
+    await answers.getByRole('button', { name: 'Agree' }).click({ timeout: 2_000 });
   }
   await page.getByRole('button', { name: 'Sign it' }).click();
   await expect(page.getByText('You have signed. Thank you.')).toBeVisible();
