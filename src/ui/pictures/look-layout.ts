@@ -10,6 +10,8 @@ import {
 export const HAND_DEG = 10;
 /** How much ground is shown below the skyline. */
 const GROUND_DEG = 6;
+/** Between a path and the words above it. */
+const CLEAR_PX = 8;
 const LINE_PX = 24;
 /** Average width of a letter of the small type. */
 const LETTER_PX = 8.4;
@@ -43,17 +45,26 @@ export function lookView(
   };
 }
 
-/** Tops of the label lines in pixels: beside their points, above the ground, none over another. */
+/**
+ * Tops of the label lines in pixels: beside their points, above the ground, none over another; above the path where it
+ * runs along under the words because the picture is too narrow for both.
+ */
 export function labelTops(
   at: readonly PathPoint[],
   points: readonly HorizonPoint[],
   scale: SkylineScale,
+  path: readonly PathPoint[],
 ): number[] {
+  const left = labelsLeft(path, scale) - 8;
+  const under = path.filter(({ azimuthDeg }) => {
+    const x = scale.x(azimuthDeg);
+    return x >= left && x <= left + WORDS_PX;
+  });
   const lowestFirst = at
     .map((point, index) => ({ point, index }))
     .sort((a, b) => a.point.altitudeDeg - b.point.altitudeDeg);
   const tops: number[] = [];
-  let limit = Infinity;
+  let limit = Math.min(Infinity, ...under.map(({ altitudeDeg }) => scale.y(altitudeDeg))) - CLEAR_PX;
   for (const { point, index } of lowestFirst) {
     const groundY = scale.y(highestHorizon(points, point.azimuthDeg, scale));
     const top = Math.min(scale.y(point.altitudeDeg) - LINE_PX / 2, groundY - LINE_PX, limit - LINE_PX);

@@ -79,8 +79,9 @@ export function wholePath(props: Pick<NeighbourProps, 'star' | 'seenPaths' | 'li
 /** The rod with its word, the star itself, and the times beside the path. */
 function takenBy(props: NeighbourProps): Patch[] {
   const { points, star, labels, scale } = props;
-  const tops = labelTops(labels, points, scale);
-  const left = labelsLeft(wholePath(props), scale);
+  const path = wholePath(props);
+  const tops = labelTops(labels, points, scale, path);
+  const left = labelsLeft(path, scale);
   return [
     // The rod is one and a half hands high; its word stands beside it.
     { left: 0, top: scale.height * 0.25, width: 110, height: scale.height * 0.75 },

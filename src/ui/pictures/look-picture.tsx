@@ -116,8 +116,9 @@ function aroundStar(props: LookPictureProps): LookPictureProps {
 /** Everything that is said stands here as live text, so that it grows with the reader's letters. */
 function WordsOnTop(props: LookPictureProps & { scale: SkylineScale }) {
   const { points, star, labels, compass, handWords, scale } = props;
-  const tops = labelTops(labels, points, scale);
-  const left = labelsLeft(wholePath(props), scale);
+  const path = wholePath(props);
+  const tops = labelTops(labels, points, scale, path);
+  const left = labelsLeft(path, scale);
   return (
     <>
       <span

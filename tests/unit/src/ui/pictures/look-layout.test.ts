@@ -44,11 +44,22 @@ describe('where to look', () => {
       ],
       hills,
       scale,
+      [],
     );
     const [low = 0, middle = 0, high = 0] = tops;
     expect(low + 24).toBeLessThanOrEqual(scale.y(6));
     expect(middle + 24).toBeLessThanOrEqual(low);
     expect(high + 24).toBeLessThanOrEqual(middle);
+  });
+
+  it('lifts the words over a slanting path that fills a narrow picture', () => {
+    const scale = scaleOf(lookView(hills, 66, 14, HEIGHT)(320), 320);
+    const path = Array.from({ length: 9 }, (_, step) => ({
+      azimuthDeg: 66 + 2 * step,
+      altitudeDeg: 6 + step,
+    }));
+    const tops = labelTops(path.slice(0, 3), hills, scale, path);
+    for (const top of tops) expect(top + 24).toBeLessThanOrEqual(scale.y(14));
   });
 
   it('leaves out compass words that would run into the one nearest to the star', () => {
