@@ -77,6 +77,7 @@ export function sheetWords({ translate: t, language, year, villageMonths }: Shee
     watchFromTo: ({ from, to }) => t('entry.watchFromTo', { range: range(from, to) }),
     fixedDay: () => t('entry.fixed'),
     fixedOn: (date) => t('entry.fixedOn', { date: day(date) }),
+    dateSetBy: (source) => t('entry.dateSetBy', { source: end(source) }),
     lastAdvised: ({ date, source }) =>
       source.trim() === ''
         ? t('entry.lastAdvisedNoSource', { date: day(date) })

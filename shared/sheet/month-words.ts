@@ -121,6 +121,7 @@ export function entryDetails(model: SheetModel, entry: SheetEntry): { text: stri
     ...(said(entry.signs)
       ? [{ text: words.lookFor({ signs: entry.signs, needed: entry.signsNeeded }), bold: false }]
       : []),
+    ...(said(entry.dateSetBy) ? [{ text: words.dateSetBy(entry.dateSetBy), bold: false }] : []),
     ...(entry.lastAdvised === null ? [] : [{ text: words.lastAdvised(entry.lastAdvised), bold: true }]),
     ...(said(entry.ifLate) ? [{ text: words.ifLate(entry.ifLate), bold: false }] : []),
     ...(said(entry.caution) ? [{ text: words.takeCare(entry.caution), bold: true }] : []),

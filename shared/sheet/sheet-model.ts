@@ -48,6 +48,8 @@ export interface SheetEntry {
   /** A watch against frost, flood, birds: an open bar, never cut short by a last date. */
   readonly isWatch: boolean;
   readonly fixedDate: string | null;
+  /** Who set the date that its days count from; empty where a sign leads, or where the last date says it already. */
+  readonly dateSetBy: string;
   readonly lastAdvised: { readonly date: string; readonly source: string } | null;
   readonly signs: string;
   readonly signsNeeded: number | null;

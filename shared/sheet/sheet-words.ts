@@ -40,6 +40,7 @@ export interface SheetWords {
   watchFromTo(of: { from: string; to: string }): string;
   fixedDay(): string;
   fixedOn(date: string): string;
+  dateSetBy(source: string): string;
   lastAdvised(of: { date: string; source: string }): string;
   lookFor(of: { signs: string; needed: number | null }): string;
   /** The signs without the words that open the sentence, for under a heading. */

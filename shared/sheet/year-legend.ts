@@ -137,7 +137,11 @@ function entryRow(model: SheetModel, entry: SheetEntry, measurer: TextMeasurer):
     { kind: 'entry', tag: String(entry.number), icon: entry.icon },
     {
       look: said(entry.signs) ? [plain(words.signs({ signs: entry.signs, needed: entry.signsNeeded }))] : [],
-      do: [...wrapLabel(entry.titles, DO.width, LEGEND_BOLD, measurer).map(strong), plain(when)],
+      do: [
+        ...wrapLabel(entry.titles, DO.width, LEGEND_BOLD, measurer).map(strong),
+        plain(when),
+        ...(said(entry.dateSetBy) ? [plain(words.dateSetBy(entry.dateSetBy))] : []),
+      ],
       late: [
         ...(entry.lastAdvised === null ? [] : [strong(words.lastAdvised(entry.lastAdvised))]),
         ...(said(entry.ifLate) ? [plain(entry.ifLate)] : []),

@@ -41,6 +41,10 @@ beforeAll(async () => {
     kind: 'belief',
     agreedToPrint: true,
   });
+  await addEntry(officer, calendarId, {
+    titleOfficer: 'Grazing opens',
+    lead: { type: 'fixed-date', date: { month: 10, day: 4 }, source: 'Water committee' },
+  });
   published = await publishDraft(village, calendarId);
   await addEntry(officer, calendarId, { titleOfficer: 'Weed the lower plots' });
   await takeBack(officer, await submit(officer, calendarId));
@@ -91,6 +95,10 @@ describe.each([
     expect(text).toContain('Signed by Elder A-1, Elder A-2, and Ostrel.');
     expect(text).toContain('three-class rule');
     expect(text).not.toContain('Draft');
+  });
+
+  it('says who set a date that work goes by', () => {
+    expect(text).toContain('The date is set by: Water committee.');
   });
 
   it('prints a belief only where its giver agreed, and leaves no trace of another', () => {

@@ -59,6 +59,16 @@ describe('files', () => {
   });
 });
 
+describe('README.md and DEVELOPERS.md', () => {
+  it('lead to files that are there', () => {
+    const links = ['README.md', 'DEVELOPERS.md'].flatMap((page) =>
+      [...textOf(page).matchAll(/\]\((?!https?:|#)([^)]+)\)/g)].map(([, target = '']) => target),
+    );
+    expect(links.length).toBeGreaterThan(0);
+    expect(links.filter((target) => !exists(target))).toEqual([]);
+  });
+});
+
 describe('DEVELOPERS.md', () => {
   it('names every folder of the first two levels', () => {
     const map = exists('DEVELOPERS.md') ? textOf('DEVELOPERS.md') : '';

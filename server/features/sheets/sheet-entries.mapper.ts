@@ -39,6 +39,7 @@ export function toSheetEntries(
       },
       isWatch: content.protectiveWatch,
       fixedDate: fixedDateOf({ content, dates }),
+      dateSetBy: dateSetBy(content),
       lastAdvised: lastAdvisedOf({ content, dates }, year),
       signs: content.otherSigns,
       signsNeeded: null,
@@ -60,6 +61,12 @@ type Body = Pick<VersionEntryBody, 'content' | 'dates'>;
 function fixedDateOf({ content, dates: { window } }: Body): string | null {
   if (content.lead.type !== 'fixed-date' || window === null) return null;
   return window.bestFrom === window.bestTo ? window.bestFrom : null;
+}
+
+/** Said once: where the same office set the last date, its name stands there. */
+function dateSetBy({ lead, lastDate }: EntryInput): string {
+  if (lead.type !== 'fixed-date' || lead.source === lastDate?.source) return '';
+  return lead.source;
 }
 
 /** The office is named where its date is the one that counts. A star may bring the last day forward, never back. */

@@ -35,6 +35,7 @@ export const texts = {
     watchFromTo: 'Keep watch: {{range}}.',
     fixed: 'fixed day',
     fixedOn: 'Fixed day: {{date}}.',
+    dateSetBy: 'The date is set by: {{source}}.',
     lastAdvised: 'Last advised: {{date}} ({{source}}).',
     lastAdvisedNoSource: 'Last advised: {{date}}.',
     lookFor: 'Look for: {{signs}}.',

@@ -49,6 +49,7 @@ export function entry(change: Partial<SheetEntry> = {}): SheetEntry {
     window: { earliest: '2027-06-10', bestFrom: '2027-06-14', bestTo: '2027-06-30', latest: '2027-07-05' },
     isWatch: false,
     fixedDate: null,
+    dateSetBy: '',
     lastAdvised: null,
     signs: '',
     signsNeeded: null,
