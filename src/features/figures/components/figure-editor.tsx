@@ -8,6 +8,7 @@ import { ApiProblem } from '#src/lib/api-problem.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
+import { KeptNotice } from '#src/ui/kept-notice.js';
 import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
@@ -140,18 +141,14 @@ export function FigureEditor(props: FigureEditorProps) {
         }}
       >
         {state.foundAt !== null && (
-          <div className="notice-line" role="status">
-            <span>{t('form.found', { when: dates.moment(state.foundAt) })}</span>
-            <Button
-              look="quiet"
-              onClick={() => {
-                state.startOver();
-                say(t('form.thrownAway'));
-              }}
-            >
-              {t('form.startOver')}
-            </Button>
-          </div>
+          <KeptNotice
+            words={t('form.found', { when: dates.moment(state.foundAt) })}
+            startOverWords={t('form.startOver')}
+            onStartOver={() => {
+              state.startOver();
+              say(t('form.thrownAway'));
+            }}
+          />
         )}
         {newer !== null && (
           <NewerFigure

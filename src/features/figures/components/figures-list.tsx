@@ -5,10 +5,8 @@ import { Link } from 'react-router-dom';
 import type { Figure } from '#shared/contracts/figures.js';
 import { useCurrentCommunity, useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
+import { VillageList } from '#src/lib/village-list.js';
 import { ButtonLink } from '#src/ui/button.js';
-import { Board } from '#src/ui/surfaces.js';
-import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { figuresQuery } from '../api/figures-queries.js';
 
 /** The village's own figures; officers add one. A part of the village's page. */
@@ -16,48 +14,28 @@ export function FiguresList() {
   const { t } = useTranslation('figures');
   const { communityId } = useCurrentCommunity();
   const mayAdd = useRoles().is('officer');
-  const words = useProblemWords();
-  const { data: figures, error, refetch } = useQuery(figuresQuery(communityId));
-  const add = (
-    <ButtonLink to={paths.newFigure()} icon={<Plus aria-hidden size={20} />}>
-      {t('list.add')}
-    </ButtonLink>
-  );
-  if (figures === undefined) {
-    return error === null ? (
-      <Board>
-        <Skeleton lines={4} />
-      </Board>
-    ) : (
-      <TroubleNote
-        sentence={words.problem(error)}
-        onRetry={() => {
-          void refetch();
-        }}
-      />
-    );
-  }
-  if (figures.length === 0) {
-    return (
-      <Board>
-        <EmptyState title={t('list.none')} action={mayAdd ? add : undefined}>
-          {t('list.noneHint')} {!mayAdd && t('list.noneHintOthers')}
-        </EmptyState>
-      </Board>
-    );
-  }
+  const query = useQuery(figuresQuery(communityId));
   return (
-    <div className="grid gap-4">
-      <p className="text-small text-umber-soft">{t('list.lead')}</p>
-      <ul className="grid gap-4 mid:grid-cols-2">
-        {figures.map((figure) => (
-          <li key={figure.id}>
-            <FigureCard figure={figure} />
-          </li>
-        ))}
-      </ul>
-      {mayAdd && <div>{add}</div>}
-    </div>
+    <VillageList
+      query={query}
+      add={
+        mayAdd ? (
+          <ButtonLink to={paths.newFigure()} icon={<Plus aria-hidden size={20} />}>
+            {t('list.add')}
+          </ButtonLink>
+        ) : null
+      }
+      none={{
+        title: t('list.none'),
+        hint: (
+          <>
+            {t('list.noneHint')} {!mayAdd && t('list.noneHintOthers')}
+          </>
+        ),
+      }}
+      lead={t('list.lead')}
+      card={(figure) => <FigureCard figure={figure} />}
+    />
   );
 }
 

@@ -8,6 +8,7 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { todayIn } from '#src/lib/days.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
+import { KeptNotice } from '#src/ui/kept-notice.js';
 import { Columns, Mast, Page, ThumbBar } from '#src/ui/page.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
@@ -180,18 +181,14 @@ export function PlaceEditor(props: PlaceEditorProps) {
         }}
       >
         {state.foundAt !== null && (
-          <div className="notice-line" role="status">
-            <span>{t('kept', { when: dates.moment(state.foundAt) })}</span>
-            <Button
-              look="quiet"
-              onClick={() => {
-                state.startOver();
-                say(t('thrownAway'));
-              }}
-            >
-              {t('startOver')}
-            </Button>
-          </div>
+          <KeptNotice
+            words={t('kept', { when: dates.moment(state.foundAt) })}
+            startOverWords={t('startOver')}
+            onStartOver={() => {
+              state.startOver();
+              say(t('thrownAway'));
+            }}
+          />
         )}
         {newer !== null && (
           <StaleBoard

@@ -5,11 +5,9 @@ import { Link } from 'react-router-dom';
 import type { Place } from '#shared/contracts/places.js';
 import { placesQuery, useCurrentCommunity, useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
+import { VillageList } from '#src/lib/village-list.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { SkylinePicture } from '#src/ui/pictures/skyline.js';
-import { Board } from '#src/ui/surfaces.js';
-import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { writeCoordinate } from '../model/coordinate.js';
 import { degreesText } from '../model/degrees.js';
 import { heightScale, turnView } from '../model/skyline-edit.js';
@@ -19,47 +17,27 @@ export function PlacesList() {
   const { t } = useTranslation('places');
   const { communityId } = useCurrentCommunity();
   const mayAdd = useRoles().is('officer');
-  const words = useProblemWords();
-  const { data: places, error, refetch } = useQuery(placesQuery(communityId));
-  const add = (
-    <ButtonLink to={paths.newPlace()} icon={<Plus aria-hidden size={20} />}>
-      {t('list.add')}
-    </ButtonLink>
-  );
-  if (places === undefined) {
-    return error === null ? (
-      <Board>
-        <Skeleton lines={4} />
-      </Board>
-    ) : (
-      <TroubleNote
-        sentence={words.problem(error)}
-        onRetry={() => {
-          void refetch();
-        }}
-      />
-    );
-  }
-  if (places.length === 0) {
-    return (
-      <Board>
-        <EmptyState title={t('list.none')} action={mayAdd ? add : undefined}>
-          {t('list.noneHint')} {!mayAdd && t('list.noneHintOthers')}
-        </EmptyState>
-      </Board>
-    );
-  }
+  const query = useQuery(placesQuery(communityId));
   return (
-    <div className="grid gap-4">
-      <ul className="grid gap-4 mid:grid-cols-2">
-        {places.map((place) => (
-          <li key={place.id}>
-            <PlaceCard place={place} />
-          </li>
-        ))}
-      </ul>
-      {mayAdd && <div>{add}</div>}
-    </div>
+    <VillageList
+      query={query}
+      add={
+        mayAdd ? (
+          <ButtonLink to={paths.newPlace()} icon={<Plus aria-hidden size={20} />}>
+            {t('list.add')}
+          </ButtonLink>
+        ) : null
+      }
+      none={{
+        title: t('list.none'),
+        hint: (
+          <>
+            {t('list.noneHint')} {!mayAdd && t('list.noneHintOthers')}
+          </>
+        ),
+      }}
+      card={(place) => <PlaceCard place={place} />}
+    />
   );
 }
 
