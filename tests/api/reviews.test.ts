@@ -7,10 +7,9 @@ import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
   answerAll,
-  beginCalendar,
   entriesOf,
-  openVillage,
   outcomes,
+  openSubmission,
   publish,
   readVersion,
   reasonOf,
@@ -31,12 +30,7 @@ beforeAll(async () => {
   api = await openTestApi();
 });
 beforeEach(async () => {
-  await api.reset();
-  village = await openVillage(api);
-  calendar = await beginCalendar(village);
-  await addEntry(village.officer, calendar.id, { titleOfficer: 'Sow long millet' });
-  await addEntry(village.officer, calendar.id, { titleOfficer: 'Seed check', crop: 'all seed' });
-  version = await submit(village.officer, calendar.id);
+  ({ village, calendar, version } = await openSubmission(api));
 });
 afterAll(() => api.close());
 

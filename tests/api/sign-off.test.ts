@@ -6,11 +6,9 @@ import type { AnswerInput } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
-  addEntry,
   answerAll,
-  beginCalendar,
-  openVillage,
   outcomes,
+  openSubmission,
   readVersion,
   reasonOf,
   says,
@@ -30,12 +28,7 @@ beforeAll(async () => {
   api = await openTestApi();
 });
 beforeEach(async () => {
-  await api.reset();
-  village = await openVillage(api);
-  calendar = await beginCalendar(village);
-  await addEntry(village.officer, calendar.id, { titleOfficer: 'Sow long millet' });
-  await addEntry(village.officer, calendar.id, { titleOfficer: 'Seed check', crop: 'all seed' });
-  version = await submit(village.officer, calendar.id);
+  ({ village, calendar, version } = await openSubmission(api));
 });
 afterAll(() => api.close());
 

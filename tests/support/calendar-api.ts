@@ -82,6 +82,18 @@ export async function submit(officer: Client, calendarId: string): Promise<Versi
   return (await officer.post(`/api/calendars/${calendarId}/versions`).expect(201)).body as Version;
 }
 
+/** Begins anew with a calendar of two entries that is out for review. */
+export async function openSubmission(
+  api: TestApi,
+): Promise<{ village: Village; calendar: Calendar; version: Version }> {
+  await api.reset();
+  const village = await openVillage(api);
+  const calendar = await beginCalendar(village);
+  await addEntry(village.officer, calendar.id, { titleOfficer: 'Sow long millet' });
+  await addEntry(village.officer, calendar.id, { titleOfficer: 'Seed check', crop: 'all seed' });
+  return { village, calendar, version: await submit(village.officer, calendar.id) };
+}
+
 export async function readVersion(client: Client, { calendarId, number }: Version): Promise<Version> {
   return (await client.get(versionPath({ calendarId, number })).expect(200)).body as Version;
 }
