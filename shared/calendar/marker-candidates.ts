@@ -9,6 +9,8 @@ export interface MarkerCandidate {
   /** A figure is found by its shape, also where its stars are faint. */
   isFigure: boolean;
   occurrence: Occurrence;
+  /** Counted in the civil year of the marker's dates: a day that comes twice in it comes as 1 and as 2. */
+  occurrenceNumber: number;
   /** Remarks about the star and about this day. */
   notes: readonly SkyNote[];
 }
@@ -37,12 +39,13 @@ export function isEasyToFind({ vMag, isFigure }: MarkerSight): boolean {
 /** Every dated phenomenon of a marker's year. */
 export function candidatesOf(markerYear: MarkerYear, sight: MarkerSight): MarkerCandidate[] {
   return Object.values(markerYear.phenomena).flatMap(({ phenomenon, occurrences }) =>
-    occurrences.map((occurrence) => ({
+    occurrences.map((occurrence, index) => ({
       markerKey: markerYear.markerKey,
       phenomenon,
       vMag: sight.vMag,
       isFigure: sight.isFigure,
       occurrence,
+      occurrenceNumber: index + 1,
       notes: [...new Set([...markerYear.notes, ...occurrence.notes])],
     })),
   );

@@ -65,7 +65,7 @@ export const sharingLevel = z.enum(SHARING_LEVELS);
 export type SharingLevel = (typeof SHARING_LEVELS)[number];
 
 /** Which of the year's occurrences, where there are two. */
-const occurrence = z.union([z.literal(1), z.literal(2)]);
+export const occurrence = z.union([z.literal(1), z.literal(2)]);
 /** A year has up to thirteen Moons of a kind. */
 const signOccurrence = z
   .number('not-a-number')

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { CLARITIES, PHENOMENON_OUTCOMES, SKY_NOTES, STAR_OUTCOMES } from '../sky/vocabulary.js';
-import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR } from './calendars.js';
+import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR, occurrence } from './calendars.js';
 import { id, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
@@ -9,6 +9,8 @@ import { civilDay, engineYear, markerKey, markerNames, occurrenceDays, phenomeno
 export const NEARNESS = ['on-the-day', 'close', 'near', 'far'] as const;
 export const EXACTNESS = ['sharp', 'fair', 'wide', 'weak', 'open'] as const;
 export const EASE = ['very-easy', 'easy', 'middling', 'hard'] as const;
+/** How much of a marker's range falls into the place's months of rain and cloud. */
+export const RAIN_CLASHES = ['none', 'partly', 'whole'] as const;
 export const CAUTIONS = ['never-disappears', 'lost-in-light-nights', 'weak-marker', 'open-range'] as const;
 
 /** The longest stretch of wanted days; the work of a whole season has no single marker. */
@@ -72,6 +74,7 @@ const moonlight = z.strictObject({ litShare: z.number(), isUp: z.boolean() });
 export const foundMarker = markerNames.extend({
   phenomenon,
   days: occurrenceDays,
+  occurrence,
   /** Negative before the wanted days, positive after, 0 within. */
   daysAway: z.number().int(),
   nearness: z.enum(NEARNESS),
@@ -83,6 +86,7 @@ export const foundMarker = markerNames.extend({
   notes: z.array(z.enum(SKY_NOTES)),
   /** Air of the month at the place. */
   clarity: z.enum(CLARITIES),
+  rain: z.enum(RAIN_CLASHES),
   azimuthDeg: z.number(),
   /** Altitude of the skyline where the star crosses it. */
   skylineAltitudeDeg: z.number(),
@@ -96,6 +100,7 @@ export type FoundMarker = z.infer<typeof foundMarker>;
 export const nearestMarker = markerNames.extend({
   phenomenon,
   days: occurrenceDays,
+  occurrence,
   daysAway: z.number().int(),
 });
 export type NearestMarker = z.infer<typeof nearestMarker>;

@@ -52,6 +52,8 @@ export const placeInput = z.strictObject({
   timeZone: z.string().max(64).refine(isTimeZone, 'unknown-time-zone'),
   skyline,
   clarityByMonth: z.array(clarity).length(12),
+  /** Months in which rain and cloud usually hide the sky; they move no date. */
+  rainMonths: z.array(z.boolean()).length(12),
   thresholdSet: z.enum(THRESHOLD_SETS),
   sameSideShiftDeg: shiftDeg,
   oppositeSideShiftDeg: shiftDeg,

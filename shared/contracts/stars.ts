@@ -242,9 +242,11 @@ export const skyFigure = z.strictObject({
 });
 export type SkyFigure = z.infer<typeof skyFigure>;
 
-/** Place as the engine needs it; kept with a version so that its dates can be explained later. */
-export const placeSnapshot = place.omit({ id: true, communityId: true, version: true }).extend({
-  /** The village's own figures that the entries go by; absent where there are none. */
-  figures: z.array(skyFigure).optional(),
-});
+/** Place as the engine needs it; kept with a version so that its dates can be explained later. Rain moves no date. */
+export const placeSnapshot = place
+  .omit({ id: true, communityId: true, version: true, rainMonths: true })
+  .extend({
+    /** The village's own figures that the entries go by; absent where there are none. */
+    figures: z.array(skyFigure).optional(),
+  });
 export type PlaceSnapshot = z.infer<typeof placeSnapshot>;

@@ -39,6 +39,8 @@ type VersionNumber = number | 'draft';
 interface MarkerQuery {
   marker?: string | undefined;
   phenomenon?: string | undefined;
+  /** Which of two such days in the year; left out for the first. */
+  occurrence?: number | undefined;
 }
 
 /** What the finder is asked, as its address has it. */

@@ -178,6 +178,7 @@ function somePlace(name: string): PlaceInput {
     timeZone: 'Asia/Aden',
     skyline: [],
     clarityByMonth: Array.from({ length: 12 }, () => 'clear' as const),
+    rainMonths: Array.from({ length: 12 }, () => false),
     thresholdSet: 'three-class',
     sameSideShiftDeg: 0,
     oppositeSideShiftDeg: 0,

@@ -85,6 +85,33 @@ describe('markers near a wanted day', () => {
   });
 });
 
+describe('months of rain and cloud', () => {
+  it('are held against the days on which each sign may come', async () => {
+    const isJune = Array.from({ length: 12 }, (_, month) => month === 5);
+    const wet = await addPlaceLike(officer, place, { name: 'Wet in June', rainMonths: isJune });
+    const { items } = await find('year=2027&from=06-10', wet);
+    const inJune = (day: string | undefined) => day?.slice(5, 7) === '06';
+    for (const { rain, days } of items) {
+      const ends = [days.early ?? days.expected, days.late ?? days.expected].map(
+        ({ gregorian }) => gregorian,
+      );
+      expect(rain).toBe(ends.every(inJune) ? 'whole' : ends.some(inJune) ? 'partly' : 'none');
+    }
+    expect(new Set(items.map(({ rain }) => rain))).toEqual(new Set(['whole', 'partly', 'none']));
+  });
+});
+
+describe('a day that comes twice in a civil year', () => {
+  it('is found under the number by which an entry goes by it', async () => {
+    const { items } = await find('year=2028&from=12-31&show=all');
+    for (const { markerKey, phenomenon, occurrence, days } of items) {
+      const year = Number(days.expected.gregorian.slice(0, 4));
+      const there = computeMarkerYear(markerKey, place, place, year).phenomena[phenomenon].occurrences;
+      expect(there[occurrence - 1]?.expected.dayNumber).toBe(days.expected.dayNumber);
+    }
+  });
+});
+
 describe('where no marker serves', () => {
   it('says how light the night is, why the bright stars do not help, and which season is next', async () => {
     const north = await addPlaceLike(officer, place, {

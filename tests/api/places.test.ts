@@ -30,6 +30,7 @@ const spring: PlaceInput = {
     { azimuthDeg: 90, altitudeDeg: -0.5 },
   ],
   clarityByMonth: Array.from({ length: 12 }, () => 'ordinary' as const),
+  rainMonths: Array.from({ length: 12 }, (_, month) => month > 5 && month < 9),
   thresholdSet: 'linear-magnitude',
   sameSideShiftDeg: 0.5,
   oppositeSideShiftDeg: -0.25,

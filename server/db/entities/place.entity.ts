@@ -48,6 +48,9 @@ export class PlaceEntity {
   @Column({ name: 'clarity_by_month', type: 'json' })
   clarityByMonth!: Clarity[];
 
+  @Column({ name: 'rain_months', type: 'json' })
+  rainMonths!: boolean[];
+
   @Column({ name: 'threshold_set', ...codeColumn(32) })
   thresholdSet!: ThresholdSetId;
 

@@ -1,6 +1,12 @@
 import { FirstSchema1796000000000 } from './1796000000000-first-schema.js';
 import { Letters1796200000000 } from './1796200000000-letters.js';
 import { Figures1796400000000 } from './1796400000000-figures.js';
+import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 
 /** In the order in which they run. */
-export const MIGRATIONS = [FirstSchema1796000000000, Letters1796200000000, Figures1796400000000];
+export const MIGRATIONS = [
+  FirstSchema1796000000000,
+  Letters1796200000000,
+  Figures1796400000000,
+  RainMonths1797000000000,
+];

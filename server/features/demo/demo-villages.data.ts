@@ -35,6 +35,11 @@ function skyline(table: string): PlaceInput['skyline'] {
   });
 }
 
+/** The twelve months with those that are named, 1 to 12. */
+function months(...named: number[]): PlaceInput['rainMonths'] {
+  return Array.from({ length: 12 }, (_, index) => named.includes(index + 1));
+}
+
 export const UPPER_TAZIMEL: DemoVillage = {
   settings: {
     name: 'Upper Tazimel',
@@ -78,6 +83,8 @@ export const UPPER_TAZIMEL: DemoVillage = {
       'clear',
       'clear',
     ],
+    // One rainy season from the middle of June to early October.
+    rainMonths: months(6, 7, 8, 9),
     thresholdSet: 'three-class',
     sameSideShiftDeg: 0,
     oppositeSideShiftDeg: 0,
@@ -124,6 +131,8 @@ export const VARDESCA_TERRACES: DemoVillage = {
       'ordinary',
       'hazy',
     ],
+    // Rains from late September.
+    rainMonths: months(10, 11, 12, 1, 2, 3),
     thresholdSet: 'three-class',
     sameSideShiftDeg: 0,
     oppositeSideShiftDeg: 0,
@@ -205,6 +214,7 @@ export const THOLMERE_LANDING: DemoVillage = {
       'hazy',
       'hazy',
     ],
+    rainMonths: months(),
     thresholdSet: 'three-class',
     sameSideShiftDeg: 0,
     oppositeSideShiftDeg: 0,

@@ -2,6 +2,7 @@ import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { MarkerCandidate } from '#shared/calendar/marker-candidates.js';
 import type { RankedMarker, WantedDays } from '#shared/calendar/marker-ranking.js';
 import { daysAwayOf } from '#shared/calendar/marker-ranking.js';
+import { rainClashOf } from '#shared/calendar/rain-clash.js';
 import {
   LATER_YEARS,
   type FoundMarker,
@@ -29,14 +30,17 @@ export interface FoundFacts {
   moon: MoonOverPlace;
   /** The village's own. */
   figures: readonly Figure[];
+  /** Of the place, January first. */
+  rainMonths: readonly boolean[];
 }
 
-export function toFoundMarker({ found, drift, moon, figures }: FoundFacts): FoundMarker {
-  const { expected } = found.occurrence;
+export function toFoundMarker({ found, drift, moon, figures, rainMonths }: FoundFacts): FoundMarker {
+  const { early, expected, late } = found.occurrence;
   return {
     ...markerNamesOf(found.markerKey, figures),
     phenomenon: found.phenomenon,
     days: occurrenceDaysOf(found.occurrence),
+    occurrence: found.occurrenceNumber === 1 ? 1 : 2,
     daysAway: found.daysAway,
     nearness: found.nearness,
     rangeDays: found.rangeDays,
@@ -45,6 +49,7 @@ export function toFoundMarker({ found, drift, moon, figures }: FoundFacts): Foun
     caution: found.caution,
     notes: [...found.notes],
     clarity: found.occurrence.clarity,
+    rain: rainClashOf({ from: (early ?? expected).dayNumber, to: (late ?? expected).dayNumber }, rainMonths),
     azimuthDeg: expected.starAzimuthDeg,
     skylineAltitudeDeg: expected.starAltitudeDeg,
     moonlight: { litShare: moon.litShare, isUp: moon.altitudeDeg > 0 },
@@ -64,6 +69,7 @@ export function toNearestMarker(
     ...markerNamesOf(candidate.markerKey, figures),
     phenomenon: candidate.phenomenon,
     days: occurrenceDaysOf(candidate.occurrence),
+    occurrence: candidate.occurrenceNumber === 1 ? 1 : 2,
     daysAway: daysAwayOf(candidate.occurrence.expected.dayNumber, wanted),
   };
 }

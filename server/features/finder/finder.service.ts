@@ -108,6 +108,7 @@ export class FinderService {
     ranked: readonly RankedMarker[],
   ): Promise<FoundMarker[]> {
     const site = siteOf(place);
+    const { figures, rainMonths } = place;
     const years = [year, ...LATER_YEARS.map((later) => year + later)];
     const drifts = new Map<string, MarkerDrift>();
     const items: FoundMarker[] = [];
@@ -115,7 +116,7 @@ export class FinderService {
       const drift = drifts.get(found.markerKey) ?? driftAt(place, found.markerKey, years);
       drifts.set(found.markerKey, drift);
       const moon = moonOverPlace(site, found.occurrence.expected.jdUt);
-      items.push(toFoundMarker({ found, drift, moon, figures: place.figures }));
+      items.push(toFoundMarker({ found, drift, moon, figures, rainMonths }));
       if (index % MARKERS_AT_A_TIME === 0) await setImmediate();
     }
     return items;

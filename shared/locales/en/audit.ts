@@ -67,6 +67,7 @@ export const texts = {
     timeZone: 'time zone',
     skyline: 'skyline',
     clarityByMonth: 'clarity of the air',
+    rainMonths: 'months of rain and cloud',
     thresholdSet: 'eye-and-air rule',
     sameSideShiftDeg: 'shift for first mornings and last evenings',
     oppositeSideShiftDeg: 'shift for last risings and first settings',

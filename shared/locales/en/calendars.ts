@@ -109,6 +109,7 @@ export const texts = {
     exists: 'There is a calendar of {{year}} for {{place}} already.',
     openExisting: 'Open that calendar',
     chooseFor: 'Which calendar shall go by it?',
+    chooseForSecond: '{{marker}}, {{phenomenon}}, the second time in the year',
     chooseForUnder: '{{marker}}: {{phenomenon}}',
     newEntryHere: 'Put it in here',
     putInto: 'Put it into the calendar of {{year}} for {{place}}',

@@ -77,7 +77,7 @@ export const texts = {
     ease: 'How easy to see',
     keeps: 'Keeps its day',
     moon: 'Moonlight in {{year}}',
-    air: 'Air',
+    air: 'Haze and rain',
     where: 'Where to look',
     act: 'Next',
   },
@@ -139,6 +139,10 @@ export const texts = {
     clear: 'Mostly clear at that time',
     ordinary: 'Ordinary at that time',
     hazy: 'Usually hazy at that time: the day may come late',
+  },
+  rain: {
+    partly: 'Partly in the months of rain and cloud',
+    whole: 'In the months of rain and cloud: it is often clouded out',
   },
   where: {
     hills: 'To the {{compass}}, over a skyline {{altitude}}° high',

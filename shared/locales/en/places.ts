@@ -39,6 +39,7 @@ export const texts = {
     timeZone: 'Clock',
     skyline: 'Skyline',
     clarityByMonth: 'How clear the air is',
+    rainMonths: 'Months of rain and cloud',
     thresholdSet: 'Eye-and-air rule',
     sameSideShift: 'Shift, star and Sun on the same side',
     oppositeSideShift: 'Shift, star and Sun on opposite sides',
@@ -172,6 +173,13 @@ export const texts = {
     hintRead:
       'Hazy air makes the first morning later and the last evening earlier; clear air does the opposite.',
     month: '{{month}}: {{clarity}}',
+  },
+
+  rain: {
+    title: 'Months of rain and cloud',
+    hint: 'Press the months in which rain and cloud usually hide the sky. They move no date; the finder of signs warns where a sign falls into them.',
+    months: 'Rain and cloud usually hide the sky in {{months}}.',
+    none: 'No month in which rain and cloud usually hide the sky.',
   },
 
   effects: {

@@ -134,6 +134,7 @@ export const texts = {
     notInTable: 'This star is not in the table',
     tie: 'Tie work to it',
     tieThis: 'Tie work to this day',
+    tieSecond: 'Tie work to the second',
     nextYear: 'Year',
     strip: 'Its year, night by night',
     stripRead: 'The night runs down the strip: dusk on top, dawn at the foot.',

@@ -22,7 +22,7 @@ export function CalendarsPage() {
   const words = useProblemWords();
   const calendars = useQuery(calendarsQuery(communityId));
   const [search] = useSearchParams();
-  const asked = wantedMarker(search.get('marker'), search.get('phenomenon'));
+  const asked = wantedMarker(search);
   const wanted = isOfficer ? asked : null;
   usePageTitle(t('list.title'));
   const list = calendars.data ?? [];

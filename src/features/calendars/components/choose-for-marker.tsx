@@ -30,7 +30,7 @@ export function ChooseForMarker({
       <p className="flex items-center gap-3">
         <PhenomenonIcon phenomenon={wanted.phenomenon} size={36} />
         <strong>
-          {t('list.chooseForUnder', {
+          {t(wanted.occurrence === 1 ? 'list.chooseForUnder' : 'list.chooseForSecond', {
             marker: row ? markerName(row) : wanted.markerKey,
             phenomenon: t(`sky:phenomenon.${wanted.phenomenon}`),
           })}

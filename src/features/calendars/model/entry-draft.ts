@@ -6,7 +6,6 @@ import {
   type FixedLastDate,
 } from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
-import type { Phenomenon } from '#shared/sky/vocabulary.js';
 
 type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
 type SkyLead = Extract<EntryLead, { type: 'sky' }>;
@@ -67,7 +66,7 @@ export function contentOf(draft: EntryDraft): EntryInput {
 }
 
 /** A new entry; on the star's page a person may have chosen what it goes by. */
-export function newDraft(marker: { markerKey: string; phenomenon: Phenomenon } | null = null): EntryDraft {
+export function newDraft(marker: EntryDraft['marker'] | null = null): EntryDraft {
   return {
     titleVillage: '',
     titleOfficer: '',
@@ -77,7 +76,7 @@ export function newDraft(marker: { markerKey: string; phenomenon: Phenomenon } |
     notes: '',
     caution: '',
     leadType: 'marker',
-    marker: marker ? { ...marker, occurrence: 1 } : NO_MARKER,
+    marker: marker ?? NO_MARKER,
     sky: NO_SKY,
     fixed: NO_FIXED,
     offsets: FIRST_OFFSETS,

@@ -20,7 +20,7 @@ export function useSelection(): Selection {
   const isWide = useWideScreen();
   const [search, setSearch] = useSearchParams();
   const openId = search.get('entry');
-  const wanted = useMemo(() => wantedMarker(search.get('marker'), search.get('phenomenon')), [search]);
+  const wanted = useMemo(() => wantedMarker(search), [search]);
   const open = useCallback(
     (entryId: string) => {
       setSearch({ entry: entryId }, { replace: isWide, preventScrollReset: isWide });

@@ -20,7 +20,7 @@ export function useWantedMarker(editor: Editor): void {
     if (!canWrite || !isWritten) return;
     edits.change(selected.id, selected.saved ?? newStart, {
       leadType: 'marker',
-      marker: { ...wanted, occurrence: 1 },
+      marker: wanted,
     });
     setSearch({ entry: selected.id }, { replace: true, preventScrollReset: true });
   }, [search, wanted, selected, openId, canWrite, edits, newStart, setSearch]);

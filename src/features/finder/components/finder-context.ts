@@ -9,7 +9,7 @@ export interface FinderFacts {
   placeId: string;
   words: FoundWords;
   /** Where a marker is taken to: the entry that asked, or the choice of a calendar. Null for who may not write. */
-  takePath: ((found: Pick<FoundMarker, 'markerKey' | 'phenomenon'>) => string) | null;
+  takePath: ((found: Pick<FoundMarker, 'markerKey' | 'phenomenon' | 'occurrence'>) => string) | null;
   /** True where an entry of a calendar waits for the answer. */
   isForEntry: boolean;
 }

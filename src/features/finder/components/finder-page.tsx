@@ -112,11 +112,11 @@ function FinderAtPlace({ place }: { place: Place }) {
   );
 }
 
-type Sign = Pick<FoundMarker, 'markerKey' | 'phenomenon'>;
+type Sign = Pick<FoundMarker, 'markerKey' | 'phenomenon' | 'occurrence'>;
 
 /** Into the entry that asked, or to the choice of a calendar for a new one. */
-function takePathOf({ markerKey, phenomenon }: Sign, forEntry: ForEntry | null): string {
-  const marker = { marker: markerKey, phenomenon };
+function takePathOf({ markerKey, phenomenon, occurrence }: Sign, forEntry: ForEntry | null): string {
+  const marker = { marker: markerKey, phenomenon, occurrence: occurrence === 1 ? undefined : occurrence };
   if (forEntry === null) return paths.calendars(marker);
   const { calendarId, entryId } = forEntry;
   return paths.calendar(calendarId, { entry: entryId ?? 'new', ...marker });

@@ -36,6 +36,7 @@ export function FoundCard({ found, isBest }: { found: FoundMarker; isBest: boole
         <li>{words.nearInFull(found)}</li>
         <li>{words.exact(found)}</li>
         <li>{words.ease(found)}</li>
+        {words.rain(found) !== null && <li>{words.rain(found)}</li>}
       </ul>
       {found.caution !== null && (
         <Care className="mt-3">

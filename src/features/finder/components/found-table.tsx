@@ -118,7 +118,10 @@ function FoundRow({ found, isFull, isBest }: { found: FoundMarker; isFull: boole
         <>
           <td>{words.keeps(found)}</td>
           <td>{words.moon(found)}</td>
-          <td>{words.air(found)}</td>
+          <td>
+            {words.air(found)}
+            {words.rain(found) !== null && <span className="range-line">{words.rain(found)}</span>}
+          </td>
           <td>{words.where(found)}</td>
         </>
       )}

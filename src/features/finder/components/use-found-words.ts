@@ -27,6 +27,8 @@ export interface FoundWords {
   keeps: (found: FoundMarker) => string;
   moon: (found: FoundMarker) => string;
   air: (found: FoundMarker) => string;
+  /** Null where no rain and cloud are to be expected. */
+  rain: (found: FoundMarker) => string | null;
   where: (found: FoundMarker) => string;
   /** The wanted days, `10 June` or `10 to 20 June`. */
   wanted: (wanted: NonNullable<FinderAnswer['wanted']>) => string;
@@ -72,6 +74,7 @@ export function useFoundWords(isStretch: boolean): FoundWords {
         return t(litShare < THIN_MOON ? 'moon.thin' : litShare < HALF_MOON ? 'moon.half' : 'moon.bright');
       },
       air: ({ clarity }) => t(`air.${clarity}`),
+      rain: ({ rain }) => (rain === 'none' ? null : t(`rain.${rain}`)),
       where: ({ azimuthDeg, skylineAltitudeDeg }) => {
         const compass = t(`sky:compass.${compassPoint(azimuthDeg)}`);
         return skylineAltitudeDeg < LEVEL_DEG

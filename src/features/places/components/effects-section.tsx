@@ -108,6 +108,7 @@ const NO_PLACE: PlaceInput = {
   timeZone: 'UTC',
   skyline: [],
   clarityByMonth: [],
+  rainMonths: [],
   thresholdSet: 'three-class',
   sameSideShiftDeg: 0,
   oppositeSideShiftDeg: 0,

@@ -9,6 +9,7 @@ export const FIELD_NAMES = {
   timeZone: 'field.timeZone',
   skyline: 'field.skyline',
   clarityByMonth: 'field.clarityByMonth',
+  rainMonths: 'field.rainMonths',
   thresholdSet: 'field.thresholdSet',
   sameSideShiftDeg: 'field.sameSideShift',
   oppositeSideShiftDeg: 'field.oppositeSideShift',

@@ -21,6 +21,7 @@ import {
   type PlaceProblems,
 } from '../model/place-draft.js';
 import { ClarityBoard } from './clarity-board.js';
+import { RainBoard } from './rain-board.js';
 import { EffectsSection } from './effects-section.js';
 import type { FieldPart } from './place-form-parts.js';
 import { previewOf } from '../model/place-preview.js';
@@ -127,7 +128,12 @@ export function PlaceEditor(props: PlaceEditorProps) {
   const boards = {
     where: <WhereBoard {...part} year={year} />,
     skyline: <SkylineBoard {...part} />,
-    clarity: <ClarityBoard {...part} />,
+    clarity: (
+      <>
+        <ClarityBoard {...part} />
+        <RainBoard {...part} />
+      </>
+    ),
     rule: <RuleBoard {...part} />,
     effects: (
       <EffectsSection
@@ -211,7 +217,7 @@ export function PlaceEditor(props: PlaceEditorProps) {
           <>
             <Columns wider="first">
               {boards.where}
-              {boards.clarity}
+              <div className="grid gap-4">{boards.clarity}</div>
             </Columns>
             {boards.skyline}
             <Columns wider="first">

@@ -8,6 +8,7 @@ import { heightScale, turnView } from '../model/skyline-edit.js';
 import { withoutFullTurn } from '../model/skyline-text.js';
 import { zoneName } from '../model/time-zone.js';
 import { ClarityMonths } from './clarity-months.js';
+import { RainMonths } from './rain-months.js';
 import { useSkylineWords } from './skyline-words.js';
 
 /** One field of a place as a person reads it: to read only, or to choose between two states. */
@@ -30,6 +31,8 @@ export function PlaceFieldValue({ field, place }: { field: PlaceField; place: Pl
       return <SmallSkyline place={place} />;
     case 'clarityByMonth':
       return <ClarityMonths clarityByMonth={place.clarityByMonth} />;
+    case 'rainMonths':
+      return <RainMonths rainMonths={place.rainMonths} />;
     case 'thresholdSet':
       return t(`rule.set.${place.thresholdSet}.name`);
     case 'sameSideShiftDeg':

@@ -16,6 +16,7 @@ import { ClarityMonths } from './clarity-months.js';
 import { EffectsSection } from './effects-section.js';
 import { FIELD_NAMES } from './field-names.js';
 import { PlaceFieldValue } from './place-field-value.js';
+import { RainMonths } from './rain-months.js';
 import { SkylineTable } from './skyline-table.js';
 import { SkylineView } from './skyline-view.js';
 import { OffsetWords } from './time-zone-field.js';
@@ -60,6 +61,9 @@ export function PlaceView({ place, communityName }: { place: Place; communityNam
             <Board title={t('clarity.title')}>
               <ClarityMonths clarityByMonth={place.clarityByMonth} />
               <p className="mt-2 text-small text-umber-soft">{t('clarity.hintRead')}</p>
+            </Board>
+            <Board title={t('rain.title')}>
+              <RainMonths rainMonths={place.rainMonths} />
             </Board>
             <Board title={t('rule.title')}>
               <p className="mb-2 text-small text-umber-soft">{t('rule.trade')}</p>

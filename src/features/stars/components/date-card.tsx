@@ -66,13 +66,20 @@ export function DateCard({
       <p className="mt-2 text-small text-umber-soft">{t(`sky:trade.${phenomenon}`)}</p>
       {mayTie && outcome === 'dated' && (
         <div className="mt-auto pt-1">
-          <ButtonLink
-            look="quiet"
-            className="-ms-2"
-            to={paths.calendars({ marker: star.markerKey, phenomenon })}
-          >
-            {t('star.tieThis')}
-          </ButtonLink>
+          {occurrences.map(({ expected }, index) => (
+            <ButtonLink
+              key={expected.dayNumber}
+              look="quiet"
+              className="-ms-2"
+              to={paths.calendars({
+                marker: star.markerKey,
+                phenomenon,
+                occurrence: index === 0 ? undefined : index + 1,
+              })}
+            >
+              {t(index === 0 ? 'star.tieThis' : 'star.tieSecond')}
+            </ButtonLink>
+          ))}
         </div>
       )}
     </Board>

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
 import { candidatesOf, countWithoutDate, isEasyToFind } from '#shared/calendar/marker-candidates.js';
-import { computeMarkerYear } from '#shared/sky/index.js';
+import { computeMarkerYear, STARS } from '#shared/sky/index.js';
 import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
 
 const yearOf = (key: string, latitudeDeg: number) =>
@@ -20,6 +20,28 @@ describe('candidates of a marker', () => {
     ]);
     expect(arcturus.notes).toContain('never-disappears');
     for (const candidate of found) expect(candidate.notes).toContain('never-disappears');
+  });
+
+  it('count a day that comes twice in a civil year, so that an entry can go by the second one', () => {
+    // A civil year of 366 days holds both ends of a year of the stars: some star at this latitude comes so.
+    const leapYears = STARS.map(({ hr }) =>
+      computeMarkerYear(`hr${String(hr)}`, siteAt(20), settingsWith(), 2028),
+    );
+    const twice = leapYears.flatMap((markerYear) => {
+      const found = candidatesOf(markerYear, bright);
+      return found.flatMap((second) =>
+        second.occurrenceNumber === 2
+          ? found
+              .filter(
+                ({ phenomenon, occurrenceNumber }) =>
+                  phenomenon === second.phenomenon && occurrenceNumber === 1,
+              )
+              .map((first) => second.occurrence.expected.dayNumber - first.occurrence.expected.dayNumber)
+          : [],
+      );
+    });
+    expect(twice.length).toBeGreaterThan(0);
+    expect(twice.every((days) => days === 365 || days === 364)).toBe(true);
   });
 
   it('are none for a star that never sets', () => {

@@ -48,6 +48,7 @@ function candidate(markerKey: string, wish: Wish = {}): MarkerCandidate {
     vMag,
     isFigure,
     notes,
+    occurrenceNumber: 1,
     occurrence: {
       ...model,
       expected: at(day, altitudeDeg),

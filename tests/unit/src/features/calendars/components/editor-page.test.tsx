@@ -258,6 +258,17 @@ describe('a sign that was looked up for an entry', () => {
     expect(screen.getByRole<HTMLInputElement>('radio', { name: /First morning seen/ }).checked).toBe(true);
   });
 
+  it('brings the second of two such days in the year, where that is the one that was found', async () => {
+    const log = answerWith(server(draft()));
+    const { user } = await open('?entry=new-x&marker=hr2491&phenomenon=heliacal-rising&occurrence=2');
+    await user.type(await screen.findByLabelText(/Name of the work or rite/), 'First weeding');
+    await user.click(save());
+    await screen.findByText('Saved: First weeding.');
+    expect(log.find(({ method }) => method === 'POST')?.body).toMatchObject({
+      lead: { type: 'marker', markerKey: 'hr2491', phenomenon: 'heliacal-rising', occurrence: 2 },
+    });
+  });
+
   it('can be looked for from the entry’s day, and the way leads back to this entry', async () => {
     const saved = draft({});
     answerWith(server(saved));

@@ -32,7 +32,9 @@ describe('an entry while it is being written', () => {
   });
 
   it('begins with the star that was chosen on its page', () => {
-    const { lead } = contentOf(newDraft({ markerKey: 'hr2491', phenomenon: 'heliacal-setting' }));
+    const { lead } = contentOf(
+      newDraft({ markerKey: 'hr2491', phenomenon: 'heliacal-setting', occurrence: 1 }),
+    );
     expect(lead).toEqual({
       type: 'marker',
       markerKey: 'hr2491',
