@@ -232,18 +232,21 @@ export function yearStrip(
 /**
  * The year of a marker beyond a star's first and last days (a culmination, the Sun at a point of the skyline, the light
  * nights …): its days with ranges, or the reason why there are none. Sources and accuracy: the file of its kind.
+ * @param figures a community's own figures, patches of sky among them; their keys stand beside the built-in ones
  */
 export function computeSkyMarker(
   spec: SkyMarkerSpec,
   site: Site,
   settings: VisibilitySettings,
   year: number,
+  figures: readonly Figure[] = [],
 ): SkyMarkerYear {
-  assertSkyMarkerSpec(spec);
+  assertFigures(figures);
+  assertSkyMarkerSpec(spec, figures);
   assertSite(site);
   assertSettings(settings);
   assertYear(year);
-  return skyMarkerYearOf(spec, { ...placeYearOf(preparedYearOf(year), site, settings), site });
+  return skyMarkerYearOf(spec, { ...placeYearOf(preparedYearOf(year), site, settings), site, figures });
 }
 
 /** The civil year that a day belongs to, if the engine offers it. */

@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { DriftAnswer } from '#shared/contracts/drift.js';
 import type { FinderAnswer } from '#shared/contracts/finder.js';
 import type { FigureDetail } from '#shared/contracts/figures.js';
+import type { SkyMarkerYear } from '#shared/contracts/sky-markers.js';
 import type { MarkerDetail, MarkerRow } from '#shared/contracts/stars.js';
 import type { Today } from '#shared/contracts/today.js';
 import type { Comparison, Version } from '#shared/contracts/versions.js';
@@ -23,6 +24,8 @@ let village: Village;
 let bowl: FigureDetail;
 let cloud: FigureDetail;
 let stars: string;
+/** The day of a published sign that goes by a figure. */
+let dayOfHerders: string;
 beforeAll(async () => {
   api = await openTestApi();
   village = await openVillage(api);
@@ -115,6 +118,86 @@ describe('a figure of the village', () => {
     expect(comparison.header.map(({ field }) => field)).toContain('place.figures');
   });
 
+  it('leads an entry by any sign of a star, frozen with its definition; while it leads it is not taken out', async () => {
+    const { officer } = village;
+    const figure = await addFigure(officer, { names: [{ tag: 'en', name: 'Three herders' }] });
+    const calendar = await beginCalendar(village, 2028);
+    const specs = {
+      'In the east': {
+        kind: 'star-altitude',
+        markerKey: figure.markerKey,
+        altitudeDeg: 30,
+        side: 'east',
+        at: { clock: 'solar-hour', solarHour: 21 },
+      },
+      Highest: { kind: 'culmination', markerKey: cloud.markerKey, twilight: 'dusk', depthDeg: 18 },
+      'Second full Moon': {
+        kind: 'moon-counted',
+        markerKey: figure.markerKey,
+        phenomenon: 'heliacal-rising',
+        event: 'full',
+        count: 2,
+      },
+    } as const;
+    for (const [titleOfficer, spec] of Object.entries(specs)) {
+      const entry = await addEntry(officer, calendar.id, {
+        lead: { type: 'sky', spec, occurrence: 1 },
+        titleOfficer,
+      });
+      expect(entry.dates.sky?.outcome, titleOfficer).toBe('dated');
+    }
+    const path = `/api/communities/${officer.communityId}/figures/${figure.id}`;
+    expect((await officer.delete(path).expect(409)).body).toMatchObject({
+      reason: 'figure-in-use',
+      names: ['In the east', 'Second full Moon'],
+    });
+    const published = await publishDraft(village, calendar.id);
+    dayOfHerders = published.entries[0]?.dates.marker?.expected.gregorian ?? '';
+    expect(published.header.place.figures?.map(({ name }) => name).sort()).toEqual([
+      'The dark herd',
+      'Three herders',
+    ]);
+    const sheet = await officer
+      .get(`/api/calendars/${calendar.id}/versions/${published.number}/sheet?layout=month-cards`)
+      .expect(200);
+    expect(JSON.stringify(sheet.body).includes('Three herders')).toBe(true);
+
+    // Sirius leads from now on: the draft moves, what hangs on the wall does not.
+    const changed = figureInput({
+      names: [{ tag: 'en', name: 'One herder' }],
+      memberHrs: [2491],
+      indicatorHr: 2491,
+    });
+    await officer.put(path, { ...changed, version: 1 }).expect(200);
+    const read = await readVersion(officer, published);
+    expect(read.entries).toEqual(published.entries);
+    expect(read.header.markers.map(({ name }) => name)).toContain('Three herders');
+    const [draft] = await entriesOf(officer, calendar.id);
+    const before = published.entries[0]?.dates.marker?.expected.dayNumber ?? Number.NaN;
+    expect(Math.abs((draft?.dates.marker?.expected.dayNumber ?? before) - before)).toBeGreaterThan(14);
+  });
+
+  it('is offered among the signs of the place, due south and at dusk; another village cannot ask for it', async () => {
+    const signs = `/api/places/${village.placeId}/sky-markers`;
+    const { items } = (await village.elder.get(`${signs}?year=2027`).expect(200)).body as {
+      items: SkyMarkerYear[];
+    };
+    const kinds = items.flatMap(({ spec }) =>
+      'markerKey' in spec && spec.markerKey === bowl.markerKey ? [spec.kind] : [],
+    );
+    expect(kinds).toEqual(['due-meridian', 'culmination']);
+    const stranger = await api.signIn('officer2');
+    const { items: places } = (await stranger.get(`/api/communities/${stranger.communityId}/places`))
+      .body as {
+      items: { id: string }[];
+    };
+    const spec = { kind: 'due-meridian', markerKey: bowl.markerKey, facing: 'south', solarHour: 21 } as const;
+    const refused = await stranger
+      .post(`/api/places/${places[0]?.id ?? ''}/sky-markers`, { year: 2027, spec })
+      .expect(422);
+    expect(refused.body).toMatchObject({ errors: [{ field: 'spec.markerKey', code: 'unknown-marker' }] });
+  });
+
   it('leads Today by the definition that was published', async () => {
     api.clock.set(new Date('2027-06-16T03:00:00Z'));
     // The old sign-in has run out by then.
@@ -122,5 +205,15 @@ describe('a figure of the village', () => {
     const path = `/api/communities/${officer.communityId}/today?placeId=${village.placeId}`;
     const { coming } = (await officer.get(path).expect(200)).body as Today;
     expect(coming.find(({ leads }) => leads.length > 0)?.marker.name).toBe('Ŋɔ́rɛ̃');
+  });
+
+  it('stands on Today as the sign that was published, under the name that it had', async () => {
+    api.clock.set(new Date(`${dayOfHerders}T03:00:00Z`));
+    const officer = await api.signIn('officer');
+    const path = `/api/communities/${officer.communityId}/today?placeId=${village.placeId}`;
+    const { comingSigns } = (await officer.get(path).expect(200)).body as Today;
+    expect(comingSigns.map(({ marker, leads }) => [marker?.name, leads])).toEqual([
+      ['Three herders', ['In the east']],
+    ]);
   });
 });

@@ -205,8 +205,7 @@ async function liveEntry(manager: EntityManager, calendarId: string, entryId: st
 }
 
 /**
- * A figure that was taken out serves no new entry; one that goes by it already may be written on. The Sun's and the
- * sky's signs go by stars and built-in figures only.
+ * A figure that was taken out serves no new entry; one that goes by it already may be written on.
  * @param field where the lead stands in the request
  */
 async function expectKnownMarker(
@@ -217,8 +216,7 @@ async function expectKnownMarker(
 ): Promise<void> {
   const markerKey = markerKeyOfLead(lead);
   if (markerKey === null) return;
-  const figures = lead.type === 'marker' ? await villageFigures(manager, communityId) : [];
-  if (knowsMarker(markerKey, figures)) return;
+  if (knowsMarker(markerKey, await villageFigures(manager, communityId))) return;
   throw invalidField(
     lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
     'unknown-marker',

@@ -15,7 +15,10 @@ export async function figureRows(
   return rows.sort((a, b) => nameOf(a).localeCompare(nameOf(b)) || a.id.localeCompare(b.id));
 }
 
-/** Entries of the community's drafts that go by a marker, by year and place; without those that were taken out. */
+/**
+ * Entries of the community's drafts that go by a marker, by its first and last days or by another sign of it; by year and
+ * place; without those that were taken out.
+ */
 export async function entriesThatGoBy(
   manager: EntityManager,
   communityId: string,
@@ -25,7 +28,11 @@ export async function entriesThatGoBy(
     where: {
       calendar: { communityId },
       deletedAt: IsNull(),
-      content: Raw((column) => `JSON_VALUE(${column}, '$.lead.markerKey') = :markerKey`, { markerKey }),
+      content: Raw(
+        (column) =>
+          `:markerKey IN (JSON_VALUE(${column}, '$.lead.markerKey'), JSON_VALUE(${column}, '$.lead.spec.markerKey'))`,
+        { markerKey },
+      ),
     },
     relations: { calendar: { place: true } },
     order: { calendar: { year: 'DESC' }, position: 'ASC' },

@@ -11,7 +11,7 @@ import {
   type TwilightDepthDeg,
   VENUS_APPEARANCES,
 } from '#shared/sky/index.js';
-import type { WatchedPlace } from '../places/watched-place.service.js';
+import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
 
 /** Stars that everybody knows. */
 const BRIGHTER_THAN_V = 1.3;
@@ -30,10 +30,12 @@ const KNOWN_KEYS: readonly string[] = [
 
 /**
  * What an officer may be offered at a place, the Sun first. Every kind stands among it with parameters that people use;
- * what the place never has falls away when its year is computed. Points of the skyline have names that only the village
- * knows, so sunrise over a point is asked for and not offered.
+ * what the place never has falls away when its year is computed; the village's own figures come before the stars. Points
+ * of the skyline have names that only the village knows, so sunrise over a point is asked for and not offered.
  */
-export function offeredSpecs({ latitudeDeg }: WatchedPlace): SkyMarkerSpec[] {
+export function offeredSpecs(place: WatchedPlace): SkyMarkerSpec[] {
+  const { latitudeDeg } = place;
+  const keys = [...figuresOf(place).map(({ key }) => key), ...KNOWN_KEYS];
   return [
     ...SUN_SEASONS.map((season) => ({ kind: 'sun-season' as const, season })),
     { kind: 'zenith-sun' as const },
@@ -50,13 +52,13 @@ export function offeredSpecs({ latitudeDeg }: WatchedPlace): SkyMarkerSpec[] {
       count: 1,
     })),
     ...VENUS_APPEARANCES.map((appearance) => ({ kind: 'venus-appearance' as const, appearance })),
-    ...KNOWN_KEYS.map((markerKey) => ({
+    ...keys.map((markerKey) => ({
       kind: 'due-meridian' as const,
       markerKey,
       facing: latitudeDeg >= 0 ? ('south' as const) : ('north' as const),
       solarHour: EVENING_HOUR,
     })),
-    ...KNOWN_KEYS.map((markerKey) => ({
+    ...keys.map((markerKey) => ({
       kind: 'culmination' as const,
       markerKey,
       twilight: 'dusk' as const,

@@ -104,12 +104,14 @@ export const texts = {
       last: {
         6: 'Last star night',
         12: 'Last night with all but the faintest stars',
-        18: 'Last night dark enough for the Milky Way',
+        15: 'Last night with the Milky Way overhead',
+        18: 'Last night without any twilight',
       },
       first: {
         6: 'First star night',
         12: 'First night with all but the faintest stars',
-        18: 'First night dark enough for the Milky Way',
+        15: 'First night with the Milky Way overhead',
+        18: 'First night without any twilight',
       },
     },
   },

@@ -21,8 +21,8 @@ const NORTHERN_HOUR_ANGLE_RAD: Readonly<Record<PolePosition, number>> = {
 export const aboutPole: SkyMarkerKindRules<'about-pole'> = {
   sourceKey: 'Aoki1982',
   rangeReason: 'eye-direction',
-  check(spec, field) {
-    knownMarker(spec.markerKey, `${field}.markerKey`);
+  check(spec, field, figures) {
+    knownMarker(spec.markerKey, `${field}.markerKey`, figures);
     checkWord(`${field}.position`, spec.position, POLE_POSITIONS);
     checkSolarHour(`${field}.solarHour`, spec.solarHour);
   },

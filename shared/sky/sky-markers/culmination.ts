@@ -14,8 +14,8 @@ import { TWILIGHT_DEPTHS_DEG, TWILIGHTS } from './words.js';
 export const culmination: SkyMarkerKindRules<'culmination'> = {
   sourceKey: 'Meeus1998',
   rangeReason: 'eye-direction',
-  check(spec, field) {
-    knownMarker(spec.markerKey, `${field}.markerKey`);
+  check(spec, field, figures) {
+    knownMarker(spec.markerKey, `${field}.markerKey`, figures);
     checkWord(`${field}.twilight`, spec.twilight, TWILIGHTS);
     checkWord(`${field}.depthDeg`, spec.depthDeg, TWILIGHT_DEPTHS_DEG);
   },

@@ -11,8 +11,8 @@ import { FACINGS } from './words.js';
 export const dueMeridian: SkyMarkerKindRules<'due-meridian'> = {
   sourceKey: 'Aoki1982',
   rangeReason: 'eye-direction',
-  check(spec, field) {
-    knownMarker(spec.markerKey, `${field}.markerKey`);
+  check(spec, field, figures) {
+    knownMarker(spec.markerKey, `${field}.markerKey`, figures);
     checkWord(`${field}.facing`, spec.facing, FACINGS);
     checkSolarHour(`${field}.solarHour`, spec.solarHour);
   },

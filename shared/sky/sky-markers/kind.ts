@@ -1,13 +1,15 @@
 import type { PlaceYear } from '../markers/place-year.js';
 import { labelledDay } from '../time/civil-day.js';
-import type { Site } from '../types.js';
+import type { Figure, Site } from '../types.js';
 import type { DailySample, Passage } from './passages.js';
 import type { SkyMarkerDay, SkyMarkerOccurrence, SpecOf } from './types.js';
 import type { SkyMarkerKind, SkyMarkerOutcome, SkyMarkerReason } from './words.js';
 
-/** A place in a prepared year, with its skyline as it was given. */
+/** A place in a prepared year, with its skyline as it was given and the figures that people there know. */
 export interface SkyMarkerPlace extends PlaceYear {
   site: Site;
+  /** A community's own figures; their keys stand beside the built-in ones. */
+  figures: readonly Figure[];
 }
 
 /** What a kind finds out. */
@@ -22,7 +24,7 @@ export interface SkyMarkerFindings {
 /** One kind of marker: a file of its own and a line in `kinds.ts`. */
 export interface SkyMarkerKindRules<K extends SkyMarkerKind> {
   /** Throws a SkyRangeError for a parameter that is out of range; `field` is where the spec stands. */
-  check(spec: SpecOf<K>, field: string): void;
+  check(spec: SpecOf<K>, field: string, figures: readonly Figure[]): void;
   compute(spec: SpecOf<K>, place: SkyMarkerPlace): SkyMarkerFindings;
   /** Key of SOURCES.md. */
   sourceKey: string;

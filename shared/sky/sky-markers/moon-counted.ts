@@ -23,7 +23,7 @@ const SHORTEST_MOON_DAYS = 29;
 const SIGN_REACH_DAYS = 60;
 
 function signsAround(spec: MoonCountedSpec, place: SkyMarkerPlace): Occurrence[] {
-  const marker = resolveMarker(spec.markerKey);
+  const marker = resolveMarker(spec.markerKey, place.figures);
   if (!marker) return [];
   const years = YEARS_BACK.map((back) => place.year.civil.year - back).filter(
     (year) => year >= FIRST_YEAR && year <= LAST_YEAR,
@@ -69,8 +69,8 @@ function countFrom(sign: Occurrence, spec: MoonCountedSpec, place: SkyMarkerPlac
 export const moonCounted: SkyMarkerKindRules<'moon-counted'> = {
   sourceKey: 'Nilsson1920',
   rangeReason: 'moon-count',
-  check(spec, field) {
-    knownMarker(spec.markerKey, `${field}.markerKey`);
+  check(spec, field, figures) {
+    knownMarker(spec.markerKey, `${field}.markerKey`, figures);
     checkWord(`${field}.phenomenon`, spec.phenomenon, PHENOMENA);
     checkWord(`${field}.event`, spec.event, MOON_EVENTS);
     checkNumber(`${field}.count`, spec.count, MOON_COUNT.min, MOON_COUNT.max, 'Moons');

@@ -1,4 +1,5 @@
 import { SkyRangeError } from '../units/sky-range-error.js';
+import type { Figure } from '../types.js';
 import { ENGINE_VERSION } from '../vocabulary.js';
 import type { SkyMarkerKindRules, SkyMarkerPlace } from './kind.js';
 import { KINDS } from './kinds.js';
@@ -17,12 +18,16 @@ function kindOf(spec: unknown): unknown {
 }
 
 /** Throws a SkyRangeError that names the parameter and what would be right. */
-export function assertSkyMarkerSpec(spec: SkyMarkerSpec, field = 'spec'): void {
+export function assertSkyMarkerSpec(
+  spec: SkyMarkerSpec,
+  figures: readonly Figure[] = [],
+  field = 'spec',
+): void {
   const kind = kindOf(spec);
   if (!SKY_MARKER_KINDS.some((known) => known === kind)) {
     throw new SkyRangeError(`${field}.kind`, `Give one of these: ${SKY_MARKER_KINDS.join(', ')}.`);
   }
-  rulesOf(spec).check(spec, field);
+  rulesOf(spec).check(spec, field, figures);
 }
 
 export function skyMarkerYearOf(spec: SkyMarkerSpec, place: SkyMarkerPlace): SkyMarkerYear {

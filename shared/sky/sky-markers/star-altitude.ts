@@ -12,8 +12,8 @@ import { SKY_SIDES, STAR_ALTITUDE_DEG } from './words.js';
 export const starAltitude: SkyMarkerKindRules<'star-altitude'> = {
   sourceKey: 'Meeus1998',
   rangeReason: 'eye-height',
-  check(spec, field) {
-    knownMarker(spec.markerKey, `${field}.markerKey`);
+  check(spec, field, figures) {
+    knownMarker(spec.markerKey, `${field}.markerKey`, figures);
     const { min, max } = STAR_ALTITUDE_DEG;
     checkNumber(`${field}.altitudeDeg`, spec.altitudeDeg, min, max, 'degrees above the horizon');
     checkWord(`${field}.side`, spec.side, SKY_SIDES);

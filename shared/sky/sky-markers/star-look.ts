@@ -4,6 +4,7 @@ import { type ResolvedMarker, resolveMarker } from '../markers/marker-key.js';
 import { neededUpThere } from '../markers/night-crossings.js';
 import { sunPlaceAt } from '../phenomena/sun-place.js';
 import { localSiderealRad } from '../time/sidereal-clock.js';
+import type { Figure } from '../types.js';
 import { DEG_PER_RAD, RAD_PER_DEG, wrapPi } from '../units/angle.js';
 import { SkyRangeError } from '../units/sky-range-error.js';
 import {
@@ -22,9 +23,9 @@ export const EYE_DEG = 2.5;
 /** Near the pole a star's circle is so small that the eye cannot tell: wider than this no range grows. */
 const WIDEST_HOUR_ANGLE_DEG = 15;
 
-/** The marker of a spec; the door has checked the key. */
-export function knownMarker(markerKey: string, field: string): ResolvedMarker {
-  const marker = resolveMarker(markerKey);
+/** The star, figure or patch of sky of a spec; throws a SkyRangeError that names the field where there is none. */
+export function knownMarker(markerKey: string, field: string, figures: readonly Figure[]): ResolvedMarker {
+  const marker = resolveMarker(markerKey, figures);
   if (!marker) {
     throw new SkyRangeError(field, 'Give hr and a number of the star table, or the key of a figure.');
   }
@@ -40,7 +41,7 @@ export class StarLook {
     private readonly place: SkyMarkerPlace,
     markerKey: string,
   ) {
-    this.marker = markerAtPlace(place, knownMarker(markerKey, 'spec.markerKey'));
+    this.marker = markerAtPlace(place, knownMarker(markerKey, 'spec.markerKey', place.figures));
     this.star = place.year.stars.placeOf(this.marker.marker.starRef);
   }
 

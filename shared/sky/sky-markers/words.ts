@@ -49,8 +49,12 @@ export type Twilight = (typeof TWILIGHTS)[number];
 export const TWILIGHT_DEPTHS_DEG = [6, 9, 12, 18] as const;
 export type TwilightDepthDeg = (typeof TWILIGHT_DEPTHS_DEG)[number];
 
-/** Depths that may mean a dark night: the brightest stars show; ordinary stars show; the Milky Way shows. */
-export const NIGHT_DEPTHS_DEG = [6, 12, 18] as const;
+/**
+ * Depths that may mean a dark night: the brightest stars show (end of civil twilight); all but the faintest show
+ * (nautical); the Milky Way shows overhead; no twilight is left anywhere (astronomical). 15° is common practice among
+ * people who watch the Milky Way, without a published limit.
+ */
+export const NIGHT_DEPTHS_DEG = [6, 12, 15, 18] as const;
 export type NightDepthDeg = (typeof NIGHT_DEPTHS_DEG)[number];
 
 /** The last night before the light nights, and the first one after them. */

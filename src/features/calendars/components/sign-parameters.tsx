@@ -190,7 +190,7 @@ function useWordPick() {
 }
 
 /** Every depth that a sign can have, by the word of its note. */
-const DEPTH_WORDS = { 6: 'civil', 9: 'between', 12: 'nautical', 18: 'night' } as const;
+const DEPTH_WORDS = { 6: 'civil', 9: 'between', 12: 'nautical', 15: 'milkyWay', 18: 'night' } as const;
 
 function DepthPick<T extends keyof typeof DEPTH_WORDS>({
   depths,
