@@ -8,6 +8,7 @@ import type {
   SkyNote,
   StarOutcome,
   StarOutcomeDetail,
+  SunCourse,
   ThresholdSetId,
 } from './vocabulary.js';
 
@@ -192,8 +193,12 @@ export interface StripSegment {
 
 /** When to stop in the morning and begin in the evening of a civil day (Julian Days UT; null where the Sun does not cross). */
 export interface WatchTimes {
+  /** Null unless the Sun sets and rises: also where only a hill hides a Sun that is up all night. */
   stopLookingJdUt: number | null;
   startLookingJdUt: number | null;
+  /** What the Sun does in the night before the morning, and in the one after the evening. */
+  dawnSun: SunCourse;
+  duskSun: SunCourse;
   flatSunriseJdUt: number | null;
   flatSunsetJdUt: number | null;
   /** The Sun's upper edge over the place's own skyline. */

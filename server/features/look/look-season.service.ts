@@ -1,18 +1,10 @@
 import { occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import type { LookAlternative, LookSeason } from '#shared/contracts/look.js';
 import { civilDateOf } from '#shared/kernel/iso-date.js';
-import { FIGURES, markerKeyOf, STARS } from '#shared/sky/index.js';
 import type { MarkerYear, Occurrence, Phenomenon } from '#shared/sky/index.js';
 import type { WatchedPlace } from '../places/watched-place.service.js';
-import { markerNamesOf } from '../stars/marker-names.service.js';
+import { markerNamesOf, WELL_KNOWN_KEYS } from '../stars/marker-names.service.js';
 import type { SkyYearsService } from '../stars/sky-years.service.js';
-
-const BRIGHTER_THAN_V = 2;
-/** What may be offered in place of another: what nobody has to be taught to find. */
-const WELL_KNOWN_KEYS: readonly string[] = [
-  ...FIGURES.map((figure) => figure.key),
-  ...STARS.filter((star) => star.vMag < BRIGHTER_THAN_V).map((star) => markerKeyOf(star.hr)),
-];
 
 /** Days of a phenomenon with the year that they were reckoned in. */
 interface Found {

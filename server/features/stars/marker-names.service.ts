@@ -7,6 +7,13 @@ const BUILT_IN_KEYS: readonly string[] = [
   ...STARS.map((star) => markerKeyOf(star.hr)),
 ];
 
+const WELL_KNOWN_BRIGHTER_THAN_V = 2;
+/** Built-in figures and bright stars: what nobody has to be taught to find. */
+export const WELL_KNOWN_KEYS: readonly string[] = [
+  ...FIGURES.map((figure) => figure.key),
+  ...STARS.filter((star) => star.vMag < WELL_KNOWN_BRIGHTER_THAN_V).map((star) => markerKeyOf(star.hr)),
+];
+
 /** Every marker that a village knows: its own figures, the built-in ones, then the stars of the table by HR number. */
 export function allMarkerKeys(figures: readonly Figure[]): readonly string[] {
   return [...figures.map((figure) => figure.key), ...BUILT_IN_KEYS];

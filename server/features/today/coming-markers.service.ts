@@ -1,10 +1,9 @@
 import type { ComingMarker } from '#shared/contracts/today.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { civilDateFromIso, dayNumberFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
-import { FIGURES, markerKeyOf, STARS } from '#shared/sky/index.js';
 import type { MarkerYear, Occurrence, Phenomenon } from '#shared/sky/index.js';
 import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
-import { markerNamesOf } from '../stars/marker-names.service.js';
+import { markerNamesOf, WELL_KNOWN_KEYS } from '../stars/marker-names.service.js';
 import type { SkyYearsService } from '../stars/sky-years.service.js';
 import type { StarsService } from '../stars/stars.service.js';
 
@@ -20,12 +19,6 @@ const YEAR_EDGE_DAYS = 60;
 /** How many stand there when nothing is near. */
 const LATER_COUNT = 3;
 
-/** What nobody has to be taught to find, besides what the village's own calendar goes by. */
-const BRIGHTER_THAN_V = 2;
-const BUILT_IN_KEYS: readonly string[] = [
-  ...FIGURES.map((figure) => figure.key),
-  ...STARS.filter((star) => star.vMag < BRIGHTER_THAN_V).map((star) => markerKeyOf(star.hr)),
-];
 /** A star that goes and comes back is news; its other two days matter to whoever goes by them. */
 const NEWS = ['heliacal-rising', 'heliacal-setting'] as const;
 
@@ -65,7 +58,8 @@ export class ComingMarkersService {
     years: readonly number[],
     published: readonly PublishedCalendar[],
   ): Candidate[] {
-    const keys = [...figuresOf(place).map((figure) => figure.key), ...BUILT_IN_KEYS];
+    // Besides what the village's own calendar goes by, which is added below.
+    const keys = [...figuresOf(place).map((figure) => figure.key), ...WELL_KNOWN_KEYS];
     const found = new Map<string, Candidate>();
     for (const year of years) {
       for (const markerYear of this.skyYears.markerYears(place, year, keys)) {

@@ -19,8 +19,6 @@ const NIGHT_DEG = 20;
 /** Nobody watches longer for one star; near the polar circles twilight lasts as long. */
 const LONGEST_DAYS = 3 / 24;
 const STEP_DAYS = 2 / 1440;
-/** Upper edge and refraction: the Sun's centre stands this deep when it just shows. */
-const SUN_SHOWS_DEG = -0.84;
 /** Without a sunrise the watch ends where the sky is too light for any star low down. */
 const LIGHT_DEG = 6;
 
@@ -37,6 +35,8 @@ export function watchWindowOf(
 ): WatchWindow {
   const times = watchTimesOf(year, ground, clockNoonJdUt);
   const limitJdUt = side === 'dawn' ? times.stopLookingJdUt : times.startLookingJdUt;
+  const sunCourse = side === 'dawn' ? times.dawnSun : times.duskSun;
+  if (sunCourse === 'stays-up') return { sunCourse, limitJdUt, span: null };
   const sunAt = (jdUt: number): SunPlace => sunPlaceAt(year, ground, jdUt);
   const noonJdUt = clockNoonJdUt - sunAt(clockNoonJdUt).hourAngleRad / TAU;
   /** Away from the day: into the night. */
@@ -44,19 +44,12 @@ export function watchWindowOf(
   const midnightJdUt = noonJdUt + intoNight * 0.5;
   const sinAltitude = (jdUt: number): number => Math.sin(sunAt(jdUt).altitudeRad);
 
-  // Also where hills hide a Sun that is up all night: the sky is light and the Sun may stand behind the next tree.
-  if (sinAltitude(midnightJdUt) > Math.sin(SUN_SHOWS_DEG * RAD_PER_DEG))
-    return { sunCourse: 'stays-up', limitJdUt: null, span: null };
-
   const lightEnd = limitJdUt ?? firstDepth(sinAltitude, noonJdUt, midnightJdUt, LIGHT_DEG);
-  // The night may be shorter than the margins kept from the Sun.
-  if ((midnightJdUt - lightEnd) * intoNight <= STEP_DAYS)
-    return { sunCourse: 'stays-up', limitJdUt: null, span: null };
   const longest = lightEnd + intoNight * LONGEST_DAYS;
   const nearer = intoNight * Math.min(intoNight * longest, intoNight * midnightJdUt);
   const darkEnd = firstDepth(sinAltitude, lightEnd, nearer, NIGHT_DEG);
   return {
-    sunCourse: limitJdUt === null ? 'stays-down' : 'sets-and-rises',
+    sunCourse,
     limitJdUt,
     span: side === 'dawn' ? { fromJdUt: darkEnd, toJdUt: lightEnd } : { fromJdUt: lightEnd, toJdUt: darkEnd },
   };

@@ -40,6 +40,23 @@ describe('geometry that can be checked by hand', () => {
   });
 });
 
+describe('beyond the arctic circle, behind hills', () => {
+  it('a watch ends and begins with the times of the day, and there is none under a midnight Sun that only a hill hides', () => {
+    const site = siteAt(68, 20, { skyline: [{ azimuthDeg: 0, altitudeDeg: 12 }] });
+    for (let day = JD_2027_01_01 + 120; day < JD_2027_01_01 + 240; day += 4) {
+      const times = watchTimes(site, day);
+      for (const side of ['dawn', 'dusk'] as const) {
+        const look = whereToLook('hr7001', site, settingsWith(), day, side);
+        expect(look.limitJdUt).toBe(side === 'dawn' ? times.stopLookingJdUt : times.startLookingJdUt);
+        expect(look.sunCourse).toBe(side === 'dawn' ? times.dawnSun : times.duskSun);
+      }
+    }
+    const midsummer = JD_2027_01_01 + 171;
+    expect(watchTimes(site, midsummer)).toMatchObject({ stopLookingJdUt: null, startLookingJdUt: null });
+    expect(whereToLook('hr7001', site, settingsWith(), midsummer, 'dawn').outcome).toBe('sun-stays-up');
+  });
+});
+
 describe.each([
   ['Sirius at 12° N', 'hr2491', siteAt(12, 39)],
   [

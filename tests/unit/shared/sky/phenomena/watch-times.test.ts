@@ -59,7 +59,23 @@ describe('times to stop and to start looking', () => {
     };
     const midsummer = NOON_JD_UT + 92;
     const midwinter = NOON_JD_UT + 275;
-    expect(timesAt(72, [], midsummer)).toMatchObject(none);
-    expect(timesAt(72, [], midwinter)).toMatchObject(none);
+    expect(timesAt(72, [], midsummer)).toMatchObject({ ...none, dawnSun: 'stays-up', duskSun: 'stays-up' });
+    expect(timesAt(72, [], midwinter)).toMatchObject({
+      ...none,
+      dawnSun: 'stays-down',
+      duskSun: 'stays-down',
+    });
+  });
+
+  it('are none for a midnight Sun that only hills hide: the sky is light, and the Sun is behind the next tree', () => {
+    const hills = timesAt(72, [{ azimuthDeg: 0, altitudeDeg: 15 }], NOON_JD_UT + 92);
+    expect(hills).toMatchObject({ stopLookingJdUt: null, startLookingJdUt: null, dawnSun: 'stays-up' });
+    expect(hills.skylineSunriseJdUt).not.toBeNull();
+  });
+
+  it('are none for a midnight Sun that shows only where the skyline lies below the horizontal', () => {
+    const pass = timesAt(65, [{ azimuthDeg: 0, altitudeDeg: -4 }], NOON_JD_UT + 92);
+    expect(pass).toMatchObject({ stopLookingJdUt: null, startLookingJdUt: null, duskSun: 'stays-up' });
+    expect(pass.flatSunriseJdUt).not.toBeNull();
   });
 });
