@@ -1,7 +1,8 @@
 import { hatchedBar, STROKE_MM, straight } from './strokes.js';
 import type { RowSpan } from './lanes.js';
+import { moonDayMark } from './moon-days.js';
 import type { Primitive } from './primitives.js';
-import type { SheetModel } from './sheet-model.js';
+import type { SheetMarker, SheetModel } from './sheet-model.js';
 import { capHeightMm, textOnBaseline } from './text-layout.js';
 import type { TextMeasurer } from './text-layout.js';
 import { roundMm } from './units.js';
@@ -16,14 +17,20 @@ interface Sample {
   draw(left: number, middle: number): Primitive[];
 }
 
-/** A line that says what the bars mean; only the shapes that the page really shows. */
+/** A line that says what bars and small numbers mean; only what the page really shows. */
 export function barLegend(
   model: SheetModel,
   shown: readonly RowSpan[],
-  at: { readonly left: number; readonly right: number; readonly top: number },
+  at: {
+    readonly left: number;
+    readonly right: number;
+    readonly top: number;
+    readonly moonDays: boolean;
+  },
   measurer: TextMeasurer,
 ): { primitives: Primitive[]; height: number } {
   const samples = samplesFor(model, shown);
+  if (at.moonDays) samples.push(moonDaySample(model.words.legendMoonDay(), measurer));
   if (samples.length === 0) return { primitives: [], height: 0 };
   const primitives: Primitive[] = [];
   let left = at.left;
@@ -87,12 +94,28 @@ function samplesFor(model: SheetModel, shown: readonly RowSpan[]): Sample[] {
       ],
     });
   }
-  if (spans.some((span) => span.kind === 'marker')) samples.push(starSample(words.legendStar()));
+  const letters = new Set(spans.flatMap((span) => (span.kind === 'marker' ? [span.tag] : [])));
+  const markers = model.markers.filter(({ letter }) => letters.has(letter));
+  if (markers.length > 0) samples.push(markerSample(words.legendMarker(ledBy(markers))));
   return samples;
 }
 
+function ledBy(markers: readonly SheetMarker[]): 'star' | 'sign' | 'both' {
+  if (markers.every(({ isStar }) => isStar)) return 'star';
+  return markers.some(({ isStar }) => isStar) ? 'both' : 'sign';
+}
+
+function moonDaySample(words: string, measurer: TextMeasurer): Sample {
+  const width = 3;
+  return {
+    words,
+    width,
+    draw: (left, middle) => [moonDayMark(1, { right: left + width, middle }, measurer)],
+  };
+}
+
 /** A bracket with its black round, as under the holes. */
-function starSample(words: string): Sample {
+function markerSample(words: string): Sample {
   return {
     words,
     width: SAMPLE_MM + 3,

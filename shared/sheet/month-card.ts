@@ -5,6 +5,7 @@ import type { DayRow } from './day-row.js';
 import { lanesOfRow } from './lanes.js';
 import type { RowLanes, RowSpan } from './lanes.js';
 import { cardHead, holesOfMonth } from './month-head.js';
+import { moonDayMark, moonDayOf } from './moon-days.js';
 import { monthWords, undatedWords } from './month-words.js';
 import { barDown, FOOT, pageFoot } from './page-foot.js';
 import type { Primitive, SheetPage } from './primitives.js';
@@ -27,6 +28,8 @@ const BOTTOM_MM = CARD_HEIGHT_MM - 8;
 const BAR_DOWN_X_MM = 10.2;
 const BAR_DOWN_TOP_MM = 62;
 const RING_DY_MM = 4.9;
+/** Higher than the day's number, so that the two are never read as one. */
+const MOON_DAY_DY_MM = 2.9;
 const LANES_TOP_MM = 8.8;
 const LANES_HEIGHT_MM = 16.2;
 const MAX_LANES = 4;
@@ -192,7 +195,13 @@ function monthGrid(
     primitives.push(rule(LEFT_MM, RIGHT_MM, row.top));
     for (let day = from; day <= to; day += 1) {
       const isLeapDay = month === 2 && day === 29;
-      primitives.push(...dayHole(row, { date: isoOf(year, month, day), number: day, isLeapDay }, measurer));
+      const date = isoOf(year, month, day);
+      primitives.push(...dayHole(row, { date, number: day, isLeapDay }, measurer));
+      const moonDay = moonDayOf(date, model.moonBegins);
+      const right = row.leftOf(day) + CARD_PITCH_MM - 0.7;
+      if (moonDay !== null) {
+        primitives.push(moonDayMark(moonDay, { right, middle: row.top + MOON_DAY_DY_MM }, measurer));
+      }
     }
     primitives.push(...rowBars(row, lanes, measurer), ...leftOver(model, row, from, lanes, measurer));
     shown.push(...lanes.placed);
@@ -210,7 +219,12 @@ function monthGrid(
     primitives.push(...note.primitives);
     bottom = note.bottom;
   }
-  const key = barLegend(model, shown, { left: LEFT_MM, right: RIGHT_MM, top: bottom }, measurer);
+  const key = barLegend(
+    model,
+    shown,
+    { ...AREA, top: bottom, moonDays: model.moonBegins.length > 0 },
+    measurer,
+  );
   return { primitives: [...primitives, ...key.primitives], bottom: bottom + key.height };
 }
 

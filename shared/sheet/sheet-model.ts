@@ -20,6 +20,8 @@ export interface SheetMarker {
   /** The round letter that stands for it on the board. */
   readonly letter: string;
   readonly key: string;
+  /** False for a sign of the Sun, the nights or the Moon. */
+  readonly isStar: boolean;
   readonly icon: IconKey;
   readonly titles: Label;
   /** Plain name of what is seen, e.g. "first morning seen"; already translated. */
@@ -84,6 +86,8 @@ export interface SheetModel {
   readonly markers: readonly SheetMarker[];
   readonly entries: readonly SheetEntry[];
   readonly moon: readonly SheetMoon[];
+  /** Days on which a Moon's days begin to be counted, in order, from the one before the year on; empty for none. */
+  readonly moonBegins: readonly string[];
   readonly contacts: { readonly weather: string; readonly agriculture: string };
   /** What the dates rest on; one statement a line. */
   readonly basis: readonly string[];

@@ -56,7 +56,8 @@ export interface SheetWords {
   legendWatch(): string;
   legendFixed(): string;
   legendLastAdvised(): string;
-  legendStar(): string;
+  legendMarker(of: 'star' | 'sign' | 'both'): string;
+  legendMoonDay(): string;
   columnLook(): string;
   columnDo(): string;
   columnIfLate(): string;

@@ -17,6 +17,7 @@ export const TYPE_FLOORS_PT = {
   legend: 14,
   weekday: 14,
   'moon-date': 14,
+  'moon-day': 12,
   foot: 12,
   tag: 12,
   'tile-code': 8,

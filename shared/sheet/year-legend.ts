@@ -49,7 +49,7 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
       lane: 0,
     })),
   ).flat();
-  const key = barLegend(model, spans, { ...AREA, top: HEAD_BOTTOM_MM }, measurer);
+  const key = barLegend(model, spans, { ...AREA, top: HEAD_BOTTOM_MM, moonDays: false }, measurer);
   const columnsTop = HEAD_BOTTOM_MM + key.height;
   const top = columnsTop + leadingMm(LEGEND_BOLD) + 2.5;
   const room = footTop - top - 1;

@@ -54,7 +54,7 @@ export function toSheetMarkers(
     }));
 }
 
-type MarkerWords = Pick<SheetMarker, 'key' | 'icon' | 'titles' | 'phenomenon' | 'light'>;
+type MarkerWords = Pick<SheetMarker, 'key' | 'isStar' | 'icon' | 'titles' | 'phenomenon' | 'light'>;
 
 function starWords(
   lead: MarkerLead,
@@ -66,6 +66,7 @@ function starWords(
   const isMorning = lead.phenomenon === 'heliacal-rising' || lead.phenomenon === 'cosmical-setting';
   return {
     key: lead.markerKey,
+    isStar: true,
     icon: markerIconKey(lead.markerKey),
     titles: titles ?? { village: '', officer: titleOf(lead, dates, marker, texts) },
     phenomenon: texts.sky(`phenomenonTitle.${lead.phenomenon}`),
@@ -86,6 +87,7 @@ function signWords(
   const time = skyMarkerTimeOf(spec);
   return {
     key: spec.kind,
+    isStar: false,
     icon: skySignIconKey(spec),
     titles: titles ?? { village: '', officer: sign },
     phenomenon: titles ? sign : sky(`signTimeTitle.${time}`),

@@ -2,11 +2,16 @@ import type { SheetQuery } from '#shared/contracts/sheets.js';
 import type { VersionEntryBody, VersionHeader, VersionState } from '#shared/contracts/versions.js';
 import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
 import type { SheetModel, SheetMoon } from '#shared/sheet/sheet-model.js';
-import { civilDayOf, moonPhases } from '#shared/sky/index.js';
+import { dayNumberOf, isoDateOf } from '#shared/kernel/iso-date.js';
+import { civilDayOf, moonPhases, moonsBetween } from '#shared/sky/index.js';
 import { sheetWords } from '../../print/sheet-words.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
+import { settingsOf, siteOf } from '../places/watched-place.service.js';
 import { mayBePrinted, toSheetEntries } from './sheet-entries.mapper.js';
 import { toSheetMarkers } from './sheet-markers.mapper.js';
+
+/** No month from crescent to crescent is longer. */
+const LONGEST_MONTH_DAYS = 32;
 
 export interface SheetFacts {
   header: VersionHeader;
@@ -44,6 +49,7 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     markers: toSheetMarkers(printed, header.markers, year, { files, sky }),
     entries: toSheetEntries(printed, year, { files, sky, words }),
     moon: moonOf(header),
+    moonBegins: moonBeginsOf(header),
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
     basis: [basisOf(header, files)],
     signedBy: listOf(facts.signerNames, language),
@@ -68,6 +74,14 @@ function moonOf({ place, year }: VersionHeader): SheetMoon[] {
     );
     return [{ phase: quarter, date: date.join('-') }];
   });
+}
+
+/** Evenings of first crescents, from the one before the year on; where none is seen, the new Moon begins the count. */
+function moonBeginsOf({ place, year }: VersionHeader): string[] {
+  const [from, to] = [dayNumberOf(year, 1, 1) - LONGEST_MONTH_DAYS, dayNumberOf(year, 12, 31)];
+  return moonsBetween(siteOf(place), settingsOf(place), from, to)
+    .map(({ newMoon, firstCrescent }) => isoDateOf((firstCrescent.expected ?? newMoon).dayNumber))
+    .toSorted();
 }
 
 function basisOf({ place, engineVersion }: VersionHeader, t: Translate): string {

@@ -29,6 +29,7 @@ export function marker(change: Partial<SheetMarker> = {}): SheetMarker {
   return {
     letter: 'B',
     key: 'pleiades',
+    isStar: true,
     icon: 'cluster',
     titles: { village: 'Ɓèŋu̍', officer: 'Cluster returns' },
     phenomenon: 'First morning seen',
@@ -229,6 +230,7 @@ export function upperTazimel(change: Partial<SheetModel> = {}): SheetModel {
     markers,
     entries,
     moon: MOONS_2027,
+    moonBegins: MOON_BEGINS_2027,
     contacts: { weather: '900', agriculture: '901' },
     basis: ['Dates: three-class rule, ordinary air, skyline of the upper terraces, engine 1.0.0.'],
     signedBy: 'two elders and the steward',
@@ -237,6 +239,24 @@ export function upperTazimel(change: Partial<SheetModel> = {}): SheetModel {
     ...change,
   };
 }
+
+/** A day or two after each new Moon; the first stands for the Moon that the year begins in. */
+const MOON_BEGINS_2027 = [
+  '2026-12-10',
+  '2027-01-09',
+  '2027-02-08',
+  '2027-03-09',
+  '2027-04-08',
+  '2027-05-07',
+  '2027-06-06',
+  '2027-07-05',
+  '2027-08-04',
+  '2027-09-02',
+  '2027-10-02',
+  '2027-10-31',
+  '2027-11-30',
+  '2027-12-29',
+];
 
 /** Near the true phases; only their look matters here. */
 const MOONS_2027: SheetModel['moon'] = (

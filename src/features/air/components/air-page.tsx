@@ -1,4 +1,5 @@
-import { useQuery } from '@tanstack/react-query';
+import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useParams, useSearchParams } from 'react-router-dom';
 import type { AirAnswer } from '#shared/contracts/air.js';
@@ -12,6 +13,8 @@ import { markerName } from '#src/lib/marker-names.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { useSettled } from '#src/lib/settled.js';
+import { YearStepper } from '#src/lib/year-stepper.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board, Care } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
@@ -35,13 +38,30 @@ export function AirPage() {
   );
 }
 
+const PAUSE_MS = 300;
+
 function AirAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
   const { t } = useTranslation('air');
   const problems = useProblemWords();
   const dates = useDateWords();
-  const [search] = useSearchParams();
-  const year = readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year;
-  const { data, error, refetch } = useQuery(airQuery(place.id, markerKey, year));
+  const [search, setSearch] = useSearchParams();
+  const [year, setYear] = useState(() => readYear(search.get('year') ?? '') ?? todayIn(place.timeZone).year);
+  const settledYear = useSettled(year, PAUSE_MS);
+  const { data, error, refetch, isPlaceholderData } = useQuery({
+    ...airQuery(place.id, markerKey, settledYear),
+    placeholderData: keepPreviousData,
+  });
+  const changeYear = (next: number) => {
+    setYear(next);
+    setSearch(
+      (before) => {
+        before.set('year', String(next));
+        return before;
+      },
+      { replace: true, preventScrollReset: true },
+    );
+  };
+  const isLate = isPlaceholderData || settledYear !== year;
   const title = data ? t('title', { star: markerName(data) }) : t('titlePlain');
   usePageTitle(title);
   return (
@@ -51,8 +71,11 @@ function AirAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
         under={t('under', { place: place.name, year: dates.year(year) })}
         backTo={paths.star(markerKey, { placeId: place.id, year })}
       />
+      <YearStepper className="mb-4 w-44" labelForEars year={year} onChange={changeYear} />
       {data ? (
-        <Answer answer={data} />
+        <div aria-busy={isLate} className={isLate ? 'opacity-85' : undefined}>
+          <Answer answer={data} />
+        </div>
       ) : (
         <Board>
           {error === null ? (

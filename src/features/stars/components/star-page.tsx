@@ -17,6 +17,7 @@ import { Board, Care } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { starQuery } from '../api/stars-queries.js';
 import { isJulian, readYear } from '#src/lib/civil-year.js';
+import { YearStepper } from '#src/lib/year-stepper.js';
 import { phenomenonToTie } from '../model/tie.js';
 import { BasisBoard } from './basis-board.js';
 import { FourDays } from './four-days.js';
@@ -26,7 +27,6 @@ import { useStarDates } from './star-dates.js';
 import { useStarNaming } from './star-names.js';
 import { StarWays } from './star-ways.js';
 import { YearBoard } from './year-board.js';
-import { YearStepper } from './year-stepper.js';
 
 /** One star or figure from the place on screen: its year, its four days, and what they rest on. */
 export function StarPage() {

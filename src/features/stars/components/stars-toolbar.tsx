@@ -8,9 +8,9 @@ import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { Fold } from '#src/ui/fold.js';
 import { PickGroup } from '#src/ui/pick.js';
+import { YearStepper } from '#src/lib/year-stepper.js';
 import { DOES, type Does } from '../model/star-choice.js';
 import { ROWS_STEP, SORT_KEYS, type SortKey, type StarListQuery } from '../model/star-list-query.js';
-import { YearStepper } from './year-stepper.js';
 
 export interface StarsToolbarProps {
   query: StarListQuery;

@@ -329,6 +329,9 @@ function anyModel(kind: SheetModel['layout']) {
             markers,
             entries,
             moon: upperTazimel().moon.map((moon) => ({ ...moon, date: `${year}${moon.date.slice(4)}` })),
+            moonBegins: upperTazimel()
+              .moonBegins.map((date) => `${year}${date.slice(4)}`)
+              .sort(),
           }),
         );
     });

@@ -4,7 +4,7 @@ import { CARD_PITCH_MM, monthCards } from '#shared/sheet/month-card.js';
 import type { SheetPage } from '#shared/sheet/primitives.js';
 import type { SheetModel } from '#shared/sheet/sheet-model.js';
 import { allWords, rings, texts } from '#tests/support/sheet/page-checks.js';
-import { entry, upperTazimel, words } from '#tests/support/sheet/upper-tazimel-sheet.js';
+import { entry, marker, upperTazimel, words } from '#tests/support/sheet/upper-tazimel-sheet.js';
 
 let demo: SheetPage[] = [];
 // Reading the typefaces for the first time is slow.
@@ -50,6 +50,17 @@ describe('month cards', () => {
       expect(hole.radius).toBe(3);
       expect(hole.crossLength).toBe(3);
     });
+  });
+
+  it.each([
+    [[true], 'star’s days'],
+    [[false], 'sign’s days'],
+    [[true, false], 'days of a star or sign'],
+  ])('say in the key what leads: stars %j', (areStars, said) => {
+    const markers = areStars.map((isStar, index) => marker({ isStar, letter: 'AB'[index] ?? 'C' }));
+    const key = allWords([cardOf(6, { markers, entries: [] })]);
+    expect(key).toContain(said);
+    expect(key.match(/days of a star or sign|(star|sign)’s days/gu)).toEqual([said]);
   });
 
   it.each([

@@ -287,6 +287,18 @@ describe('the rest of the sheet', () => {
     expect(inYear.filter(({ date, utcDate }) => date !== utcDate).length).toBeGreaterThan(2);
   });
 
+  it('counts the Moon’s days from evenings after each new Moon, from before the year to its end', () => {
+    const { moon, moonBegins } = model([body()]);
+    expect(moonBegins[0]?.slice(0, 4)).toBe('2026');
+    const daysBetween = (from: string, to: string) => (Date.parse(to) - Date.parse(from)) / 86_400_000;
+    for (const { date } of moon.filter(({ phase }) => phase === 'new').slice(0, -1)) {
+      const begin = moonBegins.find((each) => each >= date) ?? '';
+      // A crescent is seen one to three evenings after the new Moon.
+      expect(daysBetween(date, begin)).toBeGreaterThanOrEqual(0);
+      expect(daysBetween(date, begin)).toBeLessThanOrEqual(3);
+    }
+  });
+
   it('names who signed, the place, the contacts and what the dates rest on', () => {
     expect(model([body()], { signerNames: ['Elder A-1', 'Ostrel', 'Elder A-1'] })).toMatchObject({
       signedBy: 'Elder A-1 and Ostrel',

@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { CivilDay } from '#shared/contracts/stars.js';
 import { AirPage } from '#src/features/air/components/air-page.js';
@@ -41,6 +41,15 @@ const dayOf = (day: CivilDay | null | undefined, label: 'gregorian' | 'julian' =
   Number(day?.[label].slice(-2));
 
 describe('the page of other air', () => {
+  it('goes to another year, which then stands in the address', async () => {
+    const { user, address } = await open('pleiades');
+    await user.click(screen.getByRole('button', { name: 'One more' }));
+    await waitFor(() => {
+      expect(address()).toContain('year=2028');
+      expect(screen.getByText(/Upper terraces, 2028/u)).toBeTruthy();
+    });
+  });
+
   it('has the village’s day with its range beside the model’s in each air', async () => {
     const { phenomena } = await starAir('pleiades', 2027);
     const [occurrence] = phenomena['heliacal-rising'].occurrences;

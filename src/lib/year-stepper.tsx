@@ -1,8 +1,8 @@
 import { useTranslation } from 'react-i18next';
 import { FIRST_YEAR, LAST_YEAR } from '#shared/sky/vocabulary.js';
-import { useDateWords } from '#src/lib/date-words.js';
 import { Stepper } from '#src/ui/stepper.js';
-import { readYear } from '#src/lib/civil-year.js';
+import { readYear } from './civil-year.js';
+import { useDateWords } from './date-words.js';
 
 /** Any year that the engine offers: stepped, or typed as people write it, `2027` or `44 BC`. */
 export function YearStepper({
