@@ -27,12 +27,25 @@ export const nightMinutes = z.strictObject({
 });
 export type NightMinutes = z.infer<typeof nightMinutes>;
 
+/** How far the ends of a range stand from what the day needs, degrees of the Sun's depth. */
+export const rangeWidth = z.strictObject({
+  /** What the range is computed with: the larger of the two below. */
+  halfWidthDeg: z.number().positive(),
+  /** From published scatter. */
+  byScatterDeg: z.number().positive(),
+  /** From the model: clearer and hazier air around that of the month, half a magnitude of eyesight. */
+  byModelDeg: z.number().nonnegative(),
+});
+export type RangeWidth = z.infer<typeof rangeWidth>;
+
 /** One occurrence; all its days are of the same disappearance and may fall into a neighbouring year. */
 export const airOccurrence = z.strictObject({
   /** By the place's own rule; null where that has no date. */
   rule: occurrenceDays.nullable(),
   /** How clear the air of that month usually is; null without a date. */
   ruleClarity: clarity.nullable(),
+  /** Where the width of the rule's range comes from; null without a date. */
+  ruleWidth: rangeWidth.nullable(),
   bySet: z.record(z.enum(THRESHOLD_SETS), occurrenceDays.nullable()),
   /** Null where that air never shows the star in this turn of the year. */
   byModel: z.record(clarity, modelDay.nullable()),

@@ -103,6 +103,16 @@ export interface Crossing extends CivilDay {
   sunAzimuthDeg: number;
 }
 
+/** How far the ends of a range stand from what the expected day needs, degrees of the Sun's depth. */
+export interface RangeWidth {
+  /** What the ends are computed with: the larger of the two below. */
+  halfWidthDeg: number;
+  /** From published scatter, by brightness and side. */
+  byScatterDeg: number;
+  /** From the model of visibility: clearer and hazier air around that of the month, half a magnitude of eyesight. */
+  byModelDeg: number;
+}
+
 /** One occurrence of a phenomenon: the expected day and the two ends of its range, all of the same disappearance. */
 export interface Occurrence {
   expected: Crossing;
@@ -110,6 +120,8 @@ export interface Occurrence {
   early: Crossing | null;
   late: Crossing | null;
   clarity: Clarity;
+  /** Null for Venus, whose range is that of the brightest stars. */
+  width: RangeWidth | null;
   notes: readonly SkyNote[];
 }
 

@@ -113,7 +113,7 @@ export const FIRST_YEAR = -3000;
 export const LAST_YEAR = 3000;
 
 /** Version of the method; it changes whenever a date could change. */
-export const ENGINE_VERSION = '1.1.0';
+export const ENGINE_VERSION = '1.2.0';
 
 export * from './moon/words.js';
 export { skyMarkerTimeOf } from './sky-markers/time-of.js';

@@ -45,6 +45,7 @@ describe('a second opinion on a star’s days', () => {
         late: { dayNumber: expected?.late?.dayNumber },
       });
       expect(shown?.ruleClarity).toBe(expected?.clarity);
+      expect(shown?.ruleWidth).toEqual(expected?.width);
       for (const clarity of CLARITIES) {
         expect(shown?.byModel[clarity]).toMatchObject({
           dayNumber: modelled?.byModel[clarity]?.dayNumber,

@@ -3,12 +3,12 @@ import { AstroTime, Body, DefineStar, Equator, Horizon, Observer, SearchRiseSet 
 import { benchSettings, benchSite } from './subject.js';
 
 import { modelDays } from '#shared/sky/air/model-year.js';
-import { showsAtDeg } from '#shared/sky/air/sighting.js';
 import { dayNumberOf, PHENOMENA } from '#shared/sky/index.js';
 import { resolveMarker } from '#shared/sky/markers/marker-key.js';
 import { markerAtPlace, placeYearOf } from '#shared/sky/markers/place-year.js';
 import { prepareYear } from '#shared/sky/phenomena/prepared-year.js';
 import { airAtPlace } from '#shared/sky/visibility/air.js';
+import { showsAtDeg } from '#shared/sky/visibility/hill-allowance.js';
 import { minuteScanYear } from '#tests/support/sky/minute-scan.js';
 import { scanYear } from '#tests/support/sky/oracle-scan.js';
 
@@ -66,7 +66,7 @@ export function minuteScanStarYear(): void {
     longitudeDeg: benchSite.longitudeDeg,
     year: { firstDay, lastDay },
     skylineDeg: 0,
-    nearSkylineDeg: showsAtDeg(atPlace),
+    nearSkylineDeg: showsAtDeg(atPlace.marker.vMag, atPlace.threshold.oppositeSideDeg),
     airOf: () => air,
   });
 }

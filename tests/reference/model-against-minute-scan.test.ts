@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 
 import { modelDays } from '#shared/sky/air/model-year.js';
-import { showsAtDeg } from '#shared/sky/air/sighting.js';
+import { showsAtDeg } from '#shared/sky/visibility/hill-allowance.js';
 import { PHENOMENA } from '#shared/sky/index.js';
 import { civilYearOf } from '#shared/sky/time/civil-year.js';
 import { airAtPlace } from '#shared/sky/visibility/air.js';
@@ -40,7 +40,10 @@ describe(
           year: civilYearOf(YEAR),
           skylineDeg,
           // On a hill the scan's grid meets the star up to a minute after it cleared the skyline.
-          nearSkylineDeg: Math.max(skylineDeg + 0.25, showsAtDeg(marker)),
+          nearSkylineDeg: Math.max(
+            skylineDeg + 0.25,
+            showsAtDeg(marker.marker.vMag, marker.threshold.oppositeSideDeg),
+          ),
           airOf: () => air,
         });
         for (const phenomenon of PHENOMENA) {

@@ -38,6 +38,7 @@ export function occurrence({ expected, early = null, late = null, notes = [] }: 
     early: early === null ? null : crossing(early),
     late: late === null ? null : crossing(late),
     clarity: 'ordinary',
+    width: null,
     notes,
   };
 }

@@ -29,6 +29,7 @@ function toOccurrence({ rule, bySet, byModel, nights }: SkyAirOccurrence): AirOc
   return {
     rule: rule && occurrenceDaysOf(rule),
     ruleClarity: rule?.clarity ?? null,
+    ruleWidth: rule?.width ?? null,
     bySet: each(THRESHOLD_SETS, (set) => {
       const occurrence = bySet[set];
       return occurrence && occurrenceDaysOf(occurrence);

@@ -22,6 +22,12 @@ export const texts = {
     ordinary: '',
     hazy: 'The air of that month is usually hazy here: that is in it.',
   },
+  width: {
+    scatter:
+      'The range allows for {{half}}° of the Sun’s depth to either side: so far published sightings scatter. Air and eyes alone, by the model, would ask for {{model}}° here in that month.',
+    model:
+      'The range allows for {{half}}° of the Sun’s depth to either side: so much air and eyes ask for here in that month, by the model. Published sightings scatter by {{scatter}}°.',
+  },
   noRule: {
     'none-in-this-year': 'The village’s rule has no such day in {{year}}.',
     'never-dark-enough':

@@ -4,7 +4,7 @@ import type { SkylineCrossing } from '../phenomena/skyline-crossing.js';
 import { DEG_PER_RAD } from '../units/angle.js';
 import type { Air } from '../visibility/air.js';
 import { faintestStarMag } from '../visibility/faintest-star.js';
-import { depthOnHillDeg } from '../visibility/hill-allowance.js';
+import { showsAtDeg } from '../visibility/hill-allowance.js';
 import type { MarkerAtPlace } from '../markers/place-year.js';
 
 /**
@@ -36,26 +36,15 @@ const noMoon: MoonNl = () => 0;
 const MINUTE_DAYS = 1 / 1440;
 /** No star is up longer before it is day again, polar nights apart. */
 const LONGEST_MINUTES = 720;
-const HALVINGS = 30;
-const HIGHEST_DEG = 20;
-
-/**
- * Where a star that rises against the Sun first shows on flat ground, by the place's own threshold: the Sun sinks as fast
- * as the star climbs, so it is the altitude at which the model's depth is the threshold's and that altitude together.
- */
-export function showsAtDeg({ marker, threshold }: MarkerAtPlace): number {
-  let [low, high] = [0, HIGHEST_DEG];
-  for (let step = 0; step < HALVINGS; step += 1) {
-    const middle = (low + high) / 2;
-    if (depthOnHillDeg(marker.vMag, 'ordinary', middle) - middle > threshold.oppositeSideDeg) low = middle;
-    else high = middle;
-  }
-  return high;
-}
 
 export function watched(marker: MarkerAtPlace, facts: PhenomenonFacts, crossing: SkylineCrossing): Watched {
   const upToDeg =
-    facts.side === 'same' ? 90 : Math.max(crossing.starAltitudeRad * DEG_PER_RAD, showsAtDeg(marker));
+    facts.side === 'same'
+      ? 90
+      : Math.max(
+          crossing.starAltitudeRad * DEG_PER_RAD,
+          showsAtDeg(marker.marker.vMag, marker.threshold.oppositeSideDeg),
+        );
   return { marker, facts, crossing, upToDeg };
 }
 

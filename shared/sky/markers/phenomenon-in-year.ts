@@ -2,9 +2,10 @@ import { crossingAtDeepest } from '../phenomena/dark-arc.js';
 import { PHENOMENON_FACTS, type PhenomenonFacts } from '../phenomena/phenomenon-facts.js';
 import { sunAtCrossing } from '../phenomena/skyline-crossing.js';
 import { labelledDay } from '../time/civil-day.js';
-import type { Crossing, Occurrence, PhenomenonResult } from '../types.js';
+import { monthOfDay } from '../time/civil-year.js';
+import type { Crossing, Occurrence, PhenomenonResult, RangeWidth } from '../types.js';
 import { clampUnit, DEG_PER_RAD } from '../units/angle.js';
-import { rangeHalfWidthDeg } from '../visibility/range-width.js';
+import { rangeWidthOf } from '../visibility/range-width.js';
 import type { Phenomenon } from '../vocabulary.js';
 import {
   crossingWithNeed,
@@ -47,6 +48,22 @@ function rangeEnd(
   return jdUt === null ? null : describe(marker, { ...expected, needed }, jdUt);
 }
 
+/** The width of the range around an expected crossing, in the air of its month. */
+function widthOf(
+  { marker, threshold, year, airSpanOf }: MarkerAtPlace,
+  { side }: PhenomenonFacts,
+  { crossing, clarity }: ExpectedCrossing,
+  dayNumber: number,
+): RangeWidth {
+  return rangeWidthOf({
+    vMag: marker.vMag,
+    side,
+    oppositeSideDeg: threshold.oppositeSideDeg,
+    altitudeDeg: crossing.starAltitudeRad * DEG_PER_RAD,
+    air: airSpanOf(monthOfDay(dayNumber, year.civil.calendar), clarity),
+  });
+}
+
 /** An expected crossing with the ends of its range. */
 export function occurrenceOf(
   marker: MarkerAtPlace,
@@ -54,18 +71,19 @@ export function occurrenceOf(
   expected: ExpectedCrossing,
   jdUt: number,
 ): Occurrence {
-  const halfWidthDeg = rangeHalfWidthDeg(marker.marker.vMag, facts.side);
-  // Less depth is reached earlier at the arc's dawn end and later at its dusk end.
-  const easy = rangeEnd(marker, facts, expected, -halfWidthDeg);
-  const hard = rangeEnd(marker, facts, expected, halfWidthDeg);
-  const [early, late] = facts.end === 'dawn' ? [easy, hard] : [hard, easy];
   const middle = describe(marker, expected, jdUt);
+  const width = widthOf(marker, facts, expected, middle.dayNumber);
+  // Less depth is reached earlier at the arc's dawn end and later at its dusk end.
+  const easy = rangeEnd(marker, facts, expected, -width.halfWidthDeg);
+  const hard = rangeEnd(marker, facts, expected, width.halfWidthDeg);
+  const [early, late] = facts.end === 'dawn' ? [easy, hard] : [hard, easy];
   const rangeDays = (late ?? middle).dayNumber - (early ?? middle).dayNumber;
   return {
     expected: middle,
     early,
     late,
     clarity: expected.clarity,
+    width,
     notes: rangeDays > WEAK_RANGE_DAYS ? ['weak-marker'] : [],
   };
 }

@@ -5,7 +5,9 @@ import { type Ground, type StarAtPlace, starAtPlace } from '../phenomena/skyline
 import { type DayClock, dayClockOf } from '../time/civil-day.js';
 import type { Site, VisibilitySettings } from '../types.js';
 import { RAD_PER_DEG } from '../units/angle.js';
+import { type AirSpan, airSpanAtPlace } from '../visibility/air.js';
 import { type Threshold, thresholdOf } from '../visibility/threshold-sets.js';
+import type { Clarity } from '../vocabulary.js';
 import type { ResolvedMarker } from './marker-key.js';
 
 /** A place in a prepared year. */
@@ -14,6 +16,8 @@ export interface PlaceYear {
   ground: Ground;
   clock: DayClock;
   settings: VisibilitySettings;
+  /** The air of a month, 1…12; made when it is asked for. */
+  airSpanOf: (month: number, clarity: Clarity) => AirSpan;
   /** The Sun's longitudes between which a phenomenon may belong to the civil year. */
   window: { fromRad: number; toRad: number };
 }
@@ -40,6 +44,17 @@ export function placeYearOf(year: PreparedYear, site: Site, settings: Visibility
     },
     clock: dayClockOf(site.timeZone, site.longitudeDeg),
     settings,
+    airSpanOf: airSpansOf(site),
+  };
+}
+
+function airSpansOf(site: Site): PlaceYear['airSpanOf'] {
+  const made = new Map<string, AirSpan>();
+  return (month, clarity) => {
+    const key = `${clarity} ${month}`;
+    const span = made.get(key) ?? airSpanAtPlace(site, month, clarity);
+    made.set(key, span);
+    return span;
   };
 }
 
@@ -57,6 +72,7 @@ export function markerAtPlace(placeYear: PlaceYear, marker: ResolvedMarker): Mar
     ground: placeYear.ground,
     clock: placeYear.clock,
     settings: placeYear.settings,
+    airSpanOf: placeYear.airSpanOf,
     window: placeYear.window,
     marker,
     star: starAtPlace(placeYear.year, placeYear.ground, marker.starRef),

@@ -6,7 +6,7 @@ import { monthOfDay } from '../time/civil-year.js';
 import type { Crossing, Occurrence, Site, VisibilitySettings } from '../types.js';
 import { DEG_PER_RAD, RAD_PER_DEG } from '../units/angle.js';
 import { CLARITY_SHIFT_DEG, clarityOfMonth } from '../visibility/clarity.js';
-import { rangeHalfWidthDeg } from '../visibility/range-width.js';
+import { scatterHalfWidthDeg } from '../visibility/range-width.js';
 import {
   ENGINE_VERSION,
   type PhenomenonOutcome,
@@ -79,7 +79,7 @@ function occurrenceOf(
   const found = shiftDeg === 0 ? plain : findVenus(venus, search, shiftDeg);
   if (!found) return null;
 
-  const halfWidthDeg = rangeHalfWidthDeg(VENUS_V_MAG, 'same');
+  const halfWidthDeg = scatterHalfWidthDeg(VENUS_V_MAG, 'same');
   const easy = findVenus(venus, search, shiftDeg - halfWidthDeg);
   const hard = findVenus(venus, search, shiftDeg + halfWidthDeg);
   const [first, second] = search.step === 1 ? [easy, hard] : [hard, easy];
@@ -94,7 +94,7 @@ function occurrenceOf(
   if ((late ?? expected).dayNumber - (early ?? expected).dayNumber > WEAK_RANGE_DAYS)
     notes.push('weak-marker');
   if (besideLightNights(venus, search, found)) notes.push('lost-in-light-nights');
-  return { expected, early, late, clarity, notes };
+  return { expected, early, late, clarity, width: null, notes };
 }
 
 function appearanceIn(

@@ -2,7 +2,7 @@ import { VENUS_APPEARANCES } from '../moon/words.js';
 import { venusYearOf } from '../planets/venus-year.js';
 import { labelledDay } from '../time/civil-day.js';
 import type { Occurrence } from '../types.js';
-import { rangeHalfWidthDeg } from '../visibility/range-width.js';
+import { scatterHalfWidthDeg } from '../visibility/range-width.js';
 import { dated, type SkyMarkerKindRules, undated } from './kind.js';
 import { checkWord } from './spec-checks.js';
 import type { SkyMarkerOccurrence } from './types.js';
@@ -36,7 +36,7 @@ export const venusAppearance: SkyMarkerKindRules<'venus-appearance'> = {
     checkWord(`${field}.appearance`, spec.appearance, VENUS_APPEARANCES);
   },
   compute(spec, place) {
-    const toleranceDeg = rangeHalfWidthDeg(VENUS_V_MAG, 'same');
+    const toleranceDeg = scatterHalfWidthDeg(VENUS_V_MAG, 'same');
     const { appearances } = venusYearOf(place.year, place.site, place.settings);
     const { outcome, occurrences } = appearances[spec.appearance];
     if (outcome === 'never-dark-enough') return undated('too-light', toleranceDeg);

@@ -42,6 +42,29 @@ const OPEN_COUNTRY_AEROSOL_SHARE = 0.45;
 /** Only the water term knows the temperature; ten degrees move the whole by 0.02. */
 const TEMPERATURE_C = 15;
 
+/** The air of a place in a month with what it may be on a clearer and on a hazier day, magnitudes per airmass. */
+export interface AirSpan {
+  clearerMag: number;
+  usualMag: number;
+  hazierMag: number;
+}
+
+/**
+ * A day may be clearer or hazier than its month by half of what lies between the words clear and hazy at that place: little
+ * on a high mountain, one word to either side at sea level.
+ * @param month 1…12
+ */
+export function airSpanAtPlace(
+  place: { latitudeDeg: number; elevationM: number },
+  month: number,
+  clarity: Clarity,
+): AirSpan {
+  const magOf = (word: Clarity): number => airAtPlace(place, month, word).magPerAirmass;
+  const usualMag = magOf(clarity);
+  const halfMag = (magOf('hazy') - magOf('clear')) / 2;
+  return { clearerMag: usualMag - halfMag, usualMag, hazierMag: usualMag + halfMag };
+}
+
 /**
  * The air of a place in a month.
  * @param month 1…12

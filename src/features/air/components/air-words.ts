@@ -1,6 +1,6 @@
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { AirOccurrence, ModelDay } from '#shared/contracts/air.js';
+import type { AirOccurrence, ModelDay, RangeWidth } from '#shared/contracts/air.js';
 import type { CivilDay, OccurrenceDays } from '#shared/contracts/stars.js';
 import { CLARITIES } from '#shared/sky/vocabulary.js';
 import { civilDate } from '#src/lib/civil-year.js';
@@ -17,14 +17,17 @@ export interface AirWords {
   dayAt: (occurrence: AirOccurrence, dayNumber: number) => string;
   /** The model's day with its minutes; without them where they say nothing. */
   modelDay: (day: ModelDay, side: 'dawn' | 'dusk', withMinutes: boolean) => string;
+  /** Where the width of a range comes from. */
+  width: (width: RangeWidth) => string;
   /** The picture for ears. */
   picture: (occurrence: AirOccurrence, side: 'dawn' | 'dusk', star: string) => string;
 }
 
 export function useAirWords(year: number): AirWords {
-  const { t } = useTranslation('air');
+  const { t, i18n } = useTranslation('air');
   const words = useDateWords();
   return useMemo(() => {
+    const number = new Intl.NumberFormat(i18n.language, { maximumFractionDigits: 1 });
     const date = (day: CivilDay) => civilDate(day, year);
     const about = ({ expected, early, late }: OccurrenceDays) =>
       words.aboutWithin(date(expected), early && date(early), late && date(late));
@@ -42,6 +45,12 @@ export function useAirWords(year: number): AirWords {
         withMinutes
           ? t(`modelDay.${side}`, { day: day(model), count: model.minutes })
           : t(`modelDayPlain.${side}`, { day: day(model) }),
+      width: ({ halfWidthDeg, byScatterDeg, byModelDeg }) =>
+        t(byModelDeg > byScatterDeg ? 'width.model' : 'width.scatter', {
+          half: number.format(halfWidthDeg),
+          scatter: number.format(byScatterDeg),
+          model: number.format(byModelDeg),
+        }),
       picture: (occurrence, side, star) => {
         const { nights, byModel, rule } = occurrence;
         const airs = CLARITIES.map((clarity) => {
@@ -60,5 +69,5 @@ export function useAirWords(year: number): AirWords {
         });
       },
     };
-  }, [t, words, year]);
+  }, [t, i18n.language, words, year]);
 }

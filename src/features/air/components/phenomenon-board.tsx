@@ -53,7 +53,7 @@ function OccurrenceDays(props: OccurrenceProps) {
   const { answer, occurrence, phenomenon, words } = props;
   const { t } = useTranslation('air');
   const side = endOfNight(phenomenon);
-  const { rule, ruleClarity, byModel, nights } = occurrence;
+  const { rule, ruleClarity, ruleWidth, byModel, nights } = occurrence;
   const spread = spreadDays(occurrence);
   const agreement = agreementOf(occurrence);
   const { outcome } = answer.phenomena[phenomenon];
@@ -68,6 +68,7 @@ function OccurrenceDays(props: OccurrenceProps) {
           {ruleClarity !== null && ruleClarity !== 'ordinary' && (
             <span className="range-line">{t(`ruleAir.${ruleClarity}`)}</span>
           )}
+          {ruleWidth !== null && <span className="range-line">{words.width(ruleWidth)}</span>}
         </dd>
         {CLARITIES.map((clarity) => {
           const day = byModel[clarity];

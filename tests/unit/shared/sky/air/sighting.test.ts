@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 
-import { isSighted, showsAtDeg, sightingAt, watched } from '#shared/sky/air/sighting.js';
+import { isSighted, sightingAt, watched } from '#shared/sky/air/sighting.js';
 import { PHENOMENON_FACTS } from '#shared/sky/phenomena/phenomenon-facts.js';
 import { plainAir } from '#shared/sky/visibility/air.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
@@ -69,11 +69,5 @@ describe('what the model lets a person see', () => {
     // On the hill it is the very minute of the crossing that counts.
     expect(sightingAt(watch, turnOn(1), air)?.minutes).toBe(1);
     expect(isSighted(watch, turnOn(60), air)).toBe(false);
-  });
-
-  it('shows a fainter star higher up on flat ground', () => {
-    const shows = (key: string): number => showsAtDeg(markerAt(key, siteAt(12), 2027));
-    expect(shows('hr2491')).toBeLessThan(shows('hr1457'));
-    expect(shows('hr1457')).toBeLessThan(6);
   });
 });

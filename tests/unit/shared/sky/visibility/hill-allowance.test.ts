@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
 import { EXTINCTION_OF_CLARITY, plainAir } from '#shared/sky/visibility/air.js';
-import { depthOnHillDeg, hillExcessDeg } from '#shared/sky/visibility/hill-allowance.js';
+import { depthOnHillDeg, hillExcessDeg, showsAtDeg } from '#shared/sky/visibility/hill-allowance.js';
 import {
   ALTITUDE_STEP_DEG,
   depthsByAltitude,
@@ -72,6 +72,20 @@ describe('what a hill changes', () => {
         );
       }
     }
+  });
+
+  it('is low enough on flat ground for the depth that the threshold has, and higher for a fainter star', () => {
+    // Three-class thresholds of Sirius, Aldebaran and a star of the second class.
+    for (const [vMag, oppositeSideDeg] of [
+      [-1.46, 7],
+      [0.85, 7],
+      [2, 8.5],
+    ] as const) {
+      const atDeg = showsAtDeg(vMag, oppositeSideDeg);
+      expect(depthOnHillDeg(vMag, 'ordinary', atDeg) - atDeg).toBeCloseTo(oppositeSideDeg, 1);
+    }
+    expect(showsAtDeg(-1.46, 7)).toBeLessThan(showsAtDeg(0.85, 7));
+    expect(showsAtDeg(0.85, 7)).toBeLessThan(6);
   });
 
   it('asks for more depth in haze', () => {

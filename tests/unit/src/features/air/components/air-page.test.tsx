@@ -71,6 +71,13 @@ describe('the page of other air', () => {
     expect(plain(board('Last evening seen'))).toMatch(/Evening of about/);
   });
 
+  it('says where the width of the range comes from', async () => {
+    await open('hr2491');
+    expect(plain(board('First morning seen'))).toContain(
+      'The range allows for 1.5° of the Sun’s depth to either side: so far published sightings scatter.',
+    );
+  });
+
   it('says that published rules disagree, and sets them all side by side', async () => {
     const { phenomena } = await starAir('hr1457', 2027);
     const [occurrence] = phenomena['heliacal-rising'].occurrences;

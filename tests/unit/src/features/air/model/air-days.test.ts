@@ -22,6 +22,7 @@ function occurrence(
       notes: [],
     },
     ruleClarity: rule && 'ordinary',
+    ruleWidth: rule && { halfWidthDeg: 2, byScatterDeg: 2, byModelDeg: 1.4 },
     bySet: { 'three-class': null, 'linear-magnitude': null, 'azimuth-difference': null },
     byModel: { clear, ordinary, hazy },
     nights: [],
