@@ -6,6 +6,11 @@ import path from 'node:path';
 import { pinoHttp } from 'pino-http';
 import { airRoutes } from './features/air/air.routes.js';
 import { AirService } from './features/air/air.service.js';
+import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
+import { AttachmentReadingService } from './features/attachments/attachment-reading.service.js';
+import { AttachmentWordsService } from './features/attachments/attachment-words.service.js';
+import { attachmentsRoutes } from './features/attachments/attachments.routes.js';
+import { AttachmentsService } from './features/attachments/attachments.service.js';
 import { AuditListService } from './features/audit/audit-list.service.js';
 import { auditRoutes } from './features/audit/audit.routes.js';
 import { calendarsRoutes } from './features/calendars/calendars.routes.js';
@@ -72,12 +77,21 @@ import { sessions } from './http/session.js';
 import { inboxPage } from './mail/inbox-page.js';
 import type { DevInbox } from './mail/inbox.js';
 import type { Mailer } from './mail/mailer.js';
+import type { FileScan } from './storage/file-scan.js';
+import type { FileStore } from './storage/file-store.js';
+
+/** Below DATA_DIR: files that came with a call which is not answered yet. */
+export const WAITING_FILES = 'waiting';
 
 export interface AppOptions extends AppContext {
   /** Null where letters are switched off. */
   mailer: Mailer | null;
   /** The inbox of development, to be read at /dev/letters; null everywhere else. */
   inbox?: DevInbox | null;
+  /** Keeps what people record and photograph. */
+  storage: FileStore;
+  /** Looks at every file before it is kept; null where there is no scanner. */
+  scan?: FileScan | null;
   productVersion: string;
   /** Folder of the built client; null in tests and in development, where Vite serves it. */
   clientDir: string | null;
@@ -119,6 +133,7 @@ export function createApp(options: AppOptions): App {
         directives: {
           'default-src': ["'self'"],
           'img-src': ["'self'", 'data:', 'blob:'],
+          'media-src': ["'self'", 'blob:'],
           'style-src': ["'self'", "'unsafe-inline'"],
           'upgrade-insecure-requests': config.secureCookies ? [] : null,
         },
@@ -135,7 +150,7 @@ export function createApp(options: AppOptions): App {
   router.use('/api', sessions(options), passport.initialize() as never, passport.session() as never);
   router.use('/api', csrfProtection);
 
-  const mount = new Mount(router, dataSource);
+  const mount = new Mount(router, dataSource, path.join(config.dataDir, WAITING_FILES));
   healthRoutes(mount, new HealthService(dataSource), productVersion);
   sessionRoutes(router, mount, sessionService, new DevicesService(dataSource, clock), passport, clock);
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
@@ -164,6 +179,16 @@ export function createApp(options: AppOptions): App {
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const answers = new AnswersService(dataSource, clock);
   reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
+  attachmentsRoutes(
+    mount,
+    new AttachmentsService(
+      dataSource,
+      clock,
+      new AttachmentFilesService(options.storage, options.scan ?? null),
+    ),
+    new AttachmentReadingService(dataSource, clock, options.storage),
+    new AttachmentWordsService(dataSource, clock),
+  );
   sheetsRoutes(mount, new SheetsService(contents, versions, clock));
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers);

@@ -1,12 +1,13 @@
-import { existsSync, readFileSync } from 'node:fs';
+import { existsSync, readFileSync, rmSync } from 'node:fs';
 import type { Server } from 'node:http';
 import path from 'node:path';
 import { pino, type Logger } from 'pino';
 import type { DataSource } from 'typeorm';
-import { createApp } from './app.js';
+import { createApp, WAITING_FILES } from './app.js';
 import { ConfigError, readConfig, type Config } from './config/env.js';
 import { createDataSource } from './db/data-source.js';
 import { DatabaseUnfitError, migrate } from './db/migrate.js';
+import { sweepOrphans } from './features/attachments/attachment-sweep.service.js';
 import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
 import { removeOldLetters } from './features/letters/letter-rounds.service.js';
 import { removeExpiredSessions } from './features/session/end-sessions.service.js';
@@ -14,9 +15,13 @@ import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
 import type { DevInbox } from './mail/inbox.js';
 import { createSmtpMailer } from './mail/smtp-mailer.js';
+import { commandScan } from './storage/file-scan.js';
+import { LocalFileStore } from './storage/local-file-store.js';
 
 const DAY_MS = 24 * 60 * 60 * 1000;
 const LETTER_ROUND_MS = 20_000;
+/** A picture over a village's slow network takes a quarter of an hour. */
+const SLOW_UPLOAD_MS = 30 * 60 * 1000;
 
 /** A reason not to start that the person at the machine can mend: one sentence, no stack. */
 class StartRefused extends Error {}
@@ -30,6 +35,7 @@ async function main(): Promise<void> {
   try {
     await migrate(dataSource);
     await prepareAccounts(dataSource, config, clock);
+    const storage = await openStorage(dataSource, config, log);
     const inbox = await openInbox(config);
     const smtpUrl = inbox?.smtpUrl ?? config.mail.smtpUrl;
     const mailer = smtpUrl === null ? null : createSmtpMailer({ url: smtpUrl, from: config.mail.from });
@@ -40,6 +46,8 @@ async function main(): Promise<void> {
       config,
       clock,
       log,
+      storage,
+      scan: config.scanCommand === null ? null : commandScan(config.scanCommand),
       productVersion: productVersion(),
       clientDir: clientDir(),
     });
@@ -79,6 +87,16 @@ async function prepareAccounts(dataSource: DataSource, config: Config, clock: Cl
   }
 }
 
+/** What a process that ended in the middle left behind goes first: half files, and files that no row knows. */
+async function openStorage(dataSource: DataSource, config: Config, log: Logger): Promise<LocalFileStore> {
+  rmSync(path.join(config.dataDir, WAITING_FILES), { recursive: true, force: true });
+  const storage = new LocalFileStore(path.join(config.dataDir, 'attachments'));
+  const unfinished = await storage.removeUnfinished();
+  const orphans = await sweepOrphans(dataSource, storage, new Date());
+  if (unfinished + orphans > 0) log.info({ unfinished, orphans }, 'files of nobody were removed');
+  return storage;
+}
+
 /** Loaded only where it is wanted, so that a product on a server never holds a mail server. */
 async function openInbox({ mail }: Config): Promise<DevInbox | null> {
   if (mail.inboxPort === null) return null;
@@ -94,6 +112,7 @@ function listen(express: ReturnType<typeof createApp>['express'], config: Config
           new StartRefused(`PORT ${config.port} cannot be used (${error.message}): set PORT to a free one.`),
         );
       } else {
+        server.requestTimeout = SLOW_UPLOAD_MS;
         resolve(server);
       }
     });

@@ -12,6 +12,8 @@ export interface Config {
   readonly database: DatabaseConfig;
   /** Absolute path of the folder for everything that is kept outside the database. */
   readonly dataDir: string;
+  /** Program and arguments of a virus scanner that looks at every file before it is kept; null for none. */
+  readonly scanCommand: readonly string[] | null;
   /** The address people type, without a slash at the end. */
   readonly publicUrl: string;
   /** True where the public address is https: cookies are then sent over https only. */
@@ -91,6 +93,7 @@ const variables = z.object({
     'is missing: start with `npm start`, which makes one, or set the password of DB_USER',
   ),
   DATA_DIR: z.string().default('data'),
+  SCAN_COMMAND: z.string().max(500, 'must be a program with its arguments').optional(),
   PUBLIC_URL: z
     .url({ protocol: /^https?$/, error: 'must be a whole address, such as https://calendar.example.org' })
     .optional(),
@@ -157,6 +160,7 @@ export function parseConfig(values: Readonly<Record<string, string | undefined>>
       password: env.DB_PASSWORD,
     }),
     dataDir: path.resolve(env.DATA_DIR),
+    scanCommand: env.SCAN_COMMAND?.trim().split(/\s+/u) ?? null,
     publicUrl,
     secureCookies,
     trustProxy: env.TRUST_PROXY,

@@ -1,5 +1,6 @@
 import type { Access } from '#shared/contracts/endpoint.js';
 import type { DataSource } from 'typeorm';
+import { AttachmentEntity } from '../db/entities/attachment.entity.js';
 import { CalendarEntity } from '../db/entities/calendar.entity.js';
 import { MembershipEntity } from '../db/entities/membership.entity.js';
 import { PlaceEntity } from '../db/entities/place.entity.js';
@@ -37,12 +38,11 @@ async function communityOf(
 ): Promise<string | null> {
   if (scope === 'community') return params['communityId'] ?? null;
   const id = params[`${scope}Id`] ?? '';
-  const row = await (scope === 'place'
-    ? dataSource
-        .getRepository(PlaceEntity)
-        .findOne({ where: { id }, select: { id: true, communityId: true } })
-    : dataSource
-        .getRepository(CalendarEntity)
-        .findOne({ where: { id }, select: { id: true, communityId: true } }));
+  const row = await dataSource
+    .getRepository<{ id: string; communityId: string }>(OWNERS[scope])
+    .findOne({ where: { id }, select: { id: true, communityId: true } });
   return row?.communityId ?? null;
 }
+
+/** What a path may name instead of its community. */
+const OWNERS = { place: PlaceEntity, calendar: CalendarEntity, attachment: AttachmentEntity } as const;

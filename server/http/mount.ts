@@ -6,14 +6,15 @@ import { admit } from './access.js';
 import type { Actor, Person } from './actor.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
-import { FileReply, sendFile } from './file-reply.js';
+import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
+import { withUpload, type UploadedFile } from './upload.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
 type Answer<E extends Endpoint> = E['fileType'] extends string
   ? FileReply
   : E['response'] extends z.ZodType
     ? z.input<E['response']>
-    : FileReply | undefined;
+    : FileReply | StoredFileReply | undefined;
 
 export interface Call<E extends Endpoint> {
   params: Parsed<E['params']>;
@@ -22,6 +23,11 @@ export interface Call<E extends Endpoint> {
   request: Request;
 }
 
+type UploadHandler<E extends Endpoint> = (
+  call: Call<E>,
+  actor: Actor,
+  file: UploadedFile,
+) => Promise<Answer<E>>;
 type Handler<E extends Endpoint, Who> = (call: Call<E>, who: Who) => Promise<Answer<E>> | Answer<E>;
 
 /** Binds endpoints of the contracts to a router: gate first, then input, then the answer in its schema. */
@@ -32,6 +38,8 @@ export class Mount {
   constructor(
     private readonly router: Router,
     private readonly dataSource: DataSource,
+    /** Where files wait that come with a call, until it is answered. */
+    private readonly waitingFolder: string,
   ) {}
 
   forAnybody<E extends Endpoint>(endpoint: E, handler: Handler<E, Person | null>): void {
@@ -57,19 +65,33 @@ export class Mount {
     });
   }
 
+  /** For a call that brings a file. Whoever may not send is refused before anything of the file is read. */
+  forMemberUpload<E extends Endpoint>(endpoint: E, handler: UploadHandler<E>): void {
+    const { access, upload } = endpoint;
+    if (access.kind !== 'member' || upload === null) throw new TypeError(`${endpoint.id} takes no file`);
+    this.add(endpoint, async (request, _call, response) => {
+      const person = signedIn(request);
+      const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
+      return withUpload({ request, response, folder: this.waitingFolder, upload }, ({ meta, file }) =>
+        handler(parseInput(endpoint, request, meta), actor, file),
+      );
+    });
+  }
+
   private expect(endpoint: Endpoint, kind: Endpoint['access']['kind']): void {
     if (endpoint.access.kind !== kind) throw new TypeError(`${endpoint.id} is not ${kind}`);
   }
 
   private add<E extends Endpoint>(
     endpoint: E,
-    handle: (request: Request, call: () => Call<E>) => Promise<Answer<E>>,
+    handle: (request: Request, call: () => Call<E>, response: Response) => Promise<Answer<E>>,
   ): void {
     this.ids.push(endpoint.id);
     const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
     this.router[method](endpoint.path, async (request: Request, response: Response) => {
-      const answer = await handle(request, () => parseCall(endpoint, request));
-      reply(endpoint, response, answer);
+      const answer = await handle(request, () => parseCall(endpoint, request), response);
+      if (answer instanceof StoredFileReply) await sendStoredFile(request, response, answer.file);
+      else reply(endpoint, response, answer);
     });
   }
 }
@@ -98,10 +120,14 @@ function parseCall<E extends Endpoint>(endpoint: E, request: Request): Call<E> {
   if (endpoint.body !== undefined && request.headers['content-type'] !== undefined && !request.is('json')) {
     throw new AppError('wrong-content-type');
   }
+  return parseInput(endpoint, request, request.body ?? {});
+}
+
+function parseInput<E extends Endpoint>(endpoint: E, request: Request, body: unknown): Call<E> {
   const parts = {
     params: endpoint.params?.safeParse({ ...request.params }),
     query: endpoint.query?.safeParse({ ...request.query }),
-    body: endpoint.body?.safeParse(request.body ?? {}, { reportInput: true }),
+    body: endpoint.body?.safeParse(body, { reportInput: true }),
   };
   const issues = Object.values(parts).flatMap((part) => part?.error?.issues ?? []);
   if (issues.length > 0) throw new AppError('invalid-input', { errors: fieldErrors(issues) });

@@ -40,14 +40,20 @@ function operation(endpoint: Endpoint): Json {
       ...csrf(endpoint),
     ],
     ...(endpoint.body
-      ? {
-          requestBody: {
-            required: true,
-            content: { 'application/json': { schema: schemaOf(endpoint.body, 'input') } },
-          },
-        }
+      ? { requestBody: { required: true, content: contentOf(endpoint, endpoint.body) } }
       : {}),
     responses: { [String(endpoint.status)]: success(endpoint), default: refusal },
+  };
+}
+
+function contentOf({ upload }: Endpoint, body: z.ZodType): Json {
+  const schema = schemaOf(body, 'input');
+  if (upload === null) return { 'application/json': { schema } };
+  const file = { type: 'string', format: 'binary', maxLength: upload.maxBytes };
+  return {
+    'multipart/form-data': {
+      schema: { type: 'object', required: ['meta', 'file'], properties: { meta: schema, file } },
+    },
   };
 }
 

@@ -3,13 +3,18 @@ import type { Role } from './people.js';
 
 /**
  * Who may call an endpoint. `public`: anybody; `signed-in`: any person; otherwise a member of the community that
- * the path names (by its own id, or through the place or calendar in the path) who holds one of `roles`.
+ * the path names (by its own id, or through the place, calendar or attachment in the path) who holds one of `roles`.
  * A stranger to the community gets 404, a member without the role 403.
  */
 export type Access =
-  | { kind: 'public' }
-  | { kind: 'signed-in' }
-  | { kind: 'member'; scope: 'community' | 'place' | 'calendar'; roles: readonly Role[] };
+  { kind: 'public' } | { kind: 'signed-in' } | { kind: 'member'; scope: MemberScope; roles: readonly Role[] };
+
+export type MemberScope = 'community' | 'place' | 'calendar' | 'attachment';
+
+/** A call that brings a file: multipart, the input as JSON in the field `meta`, then the file in the field `file`. */
+export interface Upload {
+  maxBytes: number;
+}
 
 export type HttpMethod = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
 
@@ -36,6 +41,8 @@ export interface Endpoint<
   status: number;
   /** Content type of an answer that is not JSON. */
   fileType: string | null;
+  /** Null where no file comes with the call. */
+  upload: Upload | null;
 }
 
 interface EndpointSpec<
@@ -55,6 +62,7 @@ interface EndpointSpec<
   response?: R;
   status?: number;
   fileType?: string;
+  upload?: Upload;
 }
 
 /** Fills the defaults: status 200 with an answer, 204 without one. */
@@ -77,13 +85,14 @@ export function defineEndpoint<
     response: spec.response as R,
     status: spec.status ?? (spec.response === undefined && fileType === null ? 204 : 200),
     fileType,
+    upload: spec.upload ?? null,
   };
 }
 
 export const anybody: Access = { kind: 'public' };
 export const signedIn: Access = { kind: 'signed-in' };
 
-export function member(scope: 'community' | 'place' | 'calendar', ...roles: Role[]): Access {
+export function member(scope: MemberScope, ...roles: Role[]): Access {
   return { kind: 'member', scope, roles };
 }
 

@@ -1,5 +1,6 @@
 import type { Endpoint } from './endpoint.js';
 import { airEndpoints } from './air.js';
+import { attachmentsEndpoints } from './attachments.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
 import { driftEndpoints } from './drift.js';
@@ -36,6 +37,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   calendarsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,
+  attachmentsEndpoints,
   sheetsEndpoints,
   auditEndpoints,
   todayEndpoints,

@@ -12,7 +12,7 @@ export const PROBLEM_TYPES = {
   conflict: { status: 409, title: 'This does not fit the present state' },
   'draft-locked': { status: 409, title: 'The draft is locked while a submission is out' },
   'too-large': { status: 413, title: 'Too much was sent' },
-  'wrong-content-type': { status: 415, title: 'Send JSON' },
+  'wrong-content-type': { status: 415, title: 'Not in a form that is read here' },
   'invalid-input': { status: 422, title: 'Some fields need a change' },
   'code-not-valid': { status: 422, title: 'This code is not valid any more' },
   'link-not-valid': { status: 422, title: 'This link is not valid any more' },

@@ -16,7 +16,9 @@ import {
   says,
   submit,
 } from '#tests/support/calendar-api.js';
+import { addPicture, attachmentInput } from '#tests/support/attachment-api.js';
 import { addFigure, figureInput } from '#tests/support/figure-api.js';
+import { plainPicture } from '#tests/support/media.js';
 import { PERMISSION_GUIDE, withPermissionTable } from '../../docker-free-scripts/lib/permission-table.js';
 
 /**
@@ -33,6 +35,8 @@ interface Village {
   entryId: string;
   personId: string;
   figureId: string;
+  /** A picture of the figure, added by somebody who calls nothing here. */
+  attachmentId: string;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
   publishedNumber: number;
@@ -100,7 +104,8 @@ async function call(endpoint: Endpoint, role: Role | null, village: Village): Pr
   const body = endpoint.body === undefined ? undefined : bodyOf(endpoint, role, village);
   const answer = await {
     GET: () => client.get(path),
-    POST: () => client.post(path, body),
+    POST: async () =>
+      endpoint.upload === null ? client.post(path, body) : client.upload(path, body, await plainPicture()),
     PUT: () => client.put(path, body),
     DELETE: () => client.delete(path),
     PATCH: () => Promise.reject(new Error('no endpoint patches')),
@@ -135,13 +140,15 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     entryId: village.entryId,
     personId: village.personId,
     figureId: village.figureId,
+    attachmentId: village.attachmentId,
+    part: '1',
     markerKey: 'pleiades',
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
   };
 }
 
-function queryOf(endpoint: Endpoint, { publishedNumber }: Village): string {
+function queryOf(endpoint: Endpoint, { publishedNumber, figureId }: Village): string {
   const queries: Record<string, string> = {
     findTimeZone: '?latitudeDeg=12&longitudeDeg=39',
     listStars: '?year=2027',
@@ -153,6 +160,7 @@ function queryOf(endpoint: Endpoint, { publishedNumber }: Village): string {
     exportDriftCsv: '?from=1500&to=2027',
     readLook: '?marker=pleiades&date=2027-06-10',
     printLook: '?marker=pleiades&date=2027-06-10',
+    listAttachments: `?subjectType=figure&subjectId=${figureId}`,
     compareVersions: `?from=${publishedNumber}&to=${publishedNumber}`,
   };
   return queries[endpoint.id] ?? '';
@@ -194,6 +202,15 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     updatePlace: () => ({ ...place, ...stale }),
     createFigure: () => figureInput(),
     updateFigure: () => ({ ...figureInput(), ...stale }),
+    createAttachment: () => attachmentInput({ subjectId: village.figureId }),
+    addAttachmentPart: () => ({ part: 1, seconds: 2 }),
+    saveAttachmentWords: () => ({
+      kind: 'words',
+      language: 'en',
+      text: 'As told',
+      checkedBySpeaker: false,
+      ...stale,
+    }),
     previewSkylineEffects: () => ({ place, year: 2027 }),
     compareMarkerYears: () => ({
       years: [2027],
@@ -227,12 +244,14 @@ async function furnishOwn(): Promise<Village> {
   const guest = { email: 'guest@example.org', displayName: 'Guest', roles: ['observer'] };
   const people = `/api/communities/${village.steward.communityId}/people`;
   const added = (await village.steward.post(people, guest).expect(201)).body as AddedPerson;
+  const figureId = (await addFigure(village.officer)).id;
   return {
     ...(await homeOf(village.officer)),
     calendarId: calendar.id,
     entryId: entry.id,
     personId: added.person.id,
-    figureId: (await addFigure(village.officer)).id,
+    figureId,
+    attachmentId: (await addPicture(village.elder, figureId)).id,
     elderId: village.elder.personId,
     publishedNumber: published.number,
     reviewedNumber: reviewed.number,
@@ -246,12 +265,14 @@ async function furnishOther(): Promise<Village> {
   const calendar = await beginCalendar({ ...(await openVillage(api)), officer, placeId: home.place.id });
   const entry = await addEntry(officer, calendar.id);
   const { number } = await submit(officer, calendar.id);
+  const figureId = (await addFigure(officer)).id;
   return {
     ...home,
     calendarId: calendar.id,
     entryId: entry.id,
     personId: officer.personId,
-    figureId: (await addFigure(officer)).id,
+    figureId,
+    attachmentId: (await addPicture(officer, figureId)).id,
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,

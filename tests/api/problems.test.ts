@@ -170,6 +170,7 @@ describe('while the database cannot be reached', () => {
       log: pino({ level: 'silent' }),
       productVersion: 'test',
       clientDir: null,
+      storage: api.storage,
       mailer: null,
     });
     const agent = request.agent(express);

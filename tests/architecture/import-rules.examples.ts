@@ -59,7 +59,8 @@ export const forbidden: readonly Forbidden[] = [
   ),
   ...breaks('server-upward-config', 'server/config/env.ts', 'server/db/data-source.ts'),
   ...breaks('server-upward-db', 'server/db/data-source.ts', 'server/storage/disk.ts'),
-  ...breaks('server-upward-storage', 'server/storage/disk.ts', 'server/mail/smtp.ts'),
+  ...breaks('server-upward-storage', 'server/storage/disk.ts', 'server/media/sound.ts'),
+  ...breaks('server-upward-media', 'server/media/sound.ts', 'server/mail/smtp.ts'),
   ...breaks('server-upward-mail', 'server/mail/smtp.ts', 'server/print/pdf.ts'),
   ...breaks('server-upward-print', 'server/print/pdf.ts', 'server/http/reply.ts'),
   ...breaks(

@@ -1,3 +1,6 @@
+import { mkdtempSync, rmSync } from 'node:fs';
+import os from 'node:os';
+import path from 'node:path';
 import { pino } from 'pino';
 import request from 'supertest';
 import type { Response, Test } from 'supertest';
@@ -7,6 +10,8 @@ import { parseConfig } from '#server/config/env.js';
 import { DEMO_DOMAIN, DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { seedDemoVillages } from '#server/features/demo/demo.service.js';
 import type { Mailer } from '#server/mail/mailer.js';
+import type { FileScan } from '#server/storage/file-scan.js';
+import { LocalFileStore } from '#server/storage/local-file-store.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { emptyTestDatabase, openTestDatabase } from './database.js';
 
@@ -16,6 +21,9 @@ export const TEST_NOW = new Date('2026-12-01T06:00:00Z');
 export interface TestApi {
   dataSource: DataSource;
   app: App;
+  /** Where attachments are kept; a folder that is gone after `close`. */
+  storage: LocalFileStore;
+  dataDir: string;
   clock: { now(): Date; set(now: Date): void };
   /** A new browser without a sign-in. */
   visitor(): Promise<Client>;
@@ -32,16 +40,24 @@ export interface TestApi {
 export interface Client {
   session: SessionState;
   get(path: string): Test;
+  head(path: string): Test;
   post(path: string, body?: unknown): Test;
   put(path: string, body?: unknown): Test;
   delete(path: string): Test;
+  /** Multipart: the input as JSON, then the file; without a file only the input. */
+  upload(path: string, meta: unknown, file: Buffer | null): Test;
+  /** As a browser sends it. */
+  cookie: string;
   /** Community of the first membership. */
   communityId: string;
   personId: string;
 }
 
 /** The product on this worker's own database, with the demo villages and a clock that stands still. */
-export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } = {}): Promise<TestApi> {
+export async function openTestApi({
+  mailer = null,
+  scan = null,
+}: { mailer?: Mailer | null; scan?: FileScan | null } = {}): Promise<TestApi> {
   const dataSource = await openTestDatabase();
   let now = TEST_NOW;
   const clock = {
@@ -50,8 +66,11 @@ export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } 
       now = next;
     },
   };
+  const dataDir = mkdtempSync(path.join(os.tmpdir(), 'dawnpeg-test-files-'));
+  const storage = new LocalFileStore(path.join(dataDir, 'attachments'));
   const config = parseConfig({
     NODE_ENV: 'test',
+    DATA_DIR: dataDir,
     DB_PASSWORD: 'unused here',
     SESSION_SECRET: 'only for tests, never for a village',
   });
@@ -59,6 +78,8 @@ export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } 
     createApp({
       dataSource,
       mailer,
+      storage,
+      scan,
       clock,
       config,
       log: pino({ level: 'silent' }),
@@ -67,6 +88,8 @@ export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } 
     });
   const api: TestApi = {
     dataSource,
+    storage,
+    dataDir,
     app: build(),
     clock,
     visitor: () => openClient(api.app),
@@ -82,13 +105,17 @@ export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } 
     reset: async () => {
       now = TEST_NOW;
       await emptyTestDatabase(dataSource);
+      rmSync(dataDir, { recursive: true, force: true });
       await seedDemoVillages(dataSource, clock);
       api.restart();
     },
     restart: () => {
       api.app = build();
     },
-    close: () => dataSource.destroy(),
+    close: async () => {
+      await dataSource.destroy();
+      rmSync(dataDir, { recursive: true, force: true });
+    },
   };
   await seedDemoVillages(dataSource, clock);
   return api;
@@ -96,13 +123,31 @@ export async function openTestApi({ mailer = null }: { mailer?: Mailer | null } 
 
 async function openClient(app: App): Promise<Client> {
   const agent = request.agent(app.express);
-  const read = async () => (await agent.get('/api/session')).body as SessionState;
+  let cookie = '';
+  const keepCookie = ({ headers }: Response) => {
+    const [sent] = (headers['set-cookie'] ?? []) as readonly string[];
+    if (sent !== undefined) cookie = sent.split(';')[0] ?? '';
+  };
+  const read = async () => {
+    const answer = await agent.get('/api/session');
+    keepCookie(answer);
+    return answer.body as SessionState;
+  };
   const client: Client = {
     session: await read(),
     get: (path) => agent.get(path),
+    head: (path) => agent.head(path),
     post: (path, body) => write(agent.post(path), body),
     put: (path, body) => write(agent.put(path), body),
     delete: (path) => write(agent.delete(path)),
+    upload: (path, meta, file) => {
+      const sent = write(agent.post(path)).field('meta', JSON.stringify(meta));
+      // The name says nothing on purpose: only the content counts.
+      return file === null ? sent : sent.attach('file', file, 'upload.bin');
+    },
+    get cookie() {
+      return cookie;
+    },
     get communityId() {
       return this.session.memberships?.[0]?.communityId ?? '';
     },
@@ -113,6 +158,7 @@ async function openClient(app: App): Promise<Client> {
   function write(test: Test, body?: unknown): Test {
     const sent = test.set('X-CSRF-Token', client.session.csrfToken);
     sent.on('response', (response: Response) => {
+      keepCookie(response);
       const next = response.body as Partial<SessionState> | undefined;
       if (typeof next?.csrfToken === 'string') client.session = next as SessionState;
     });

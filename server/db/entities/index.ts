@@ -1,4 +1,7 @@
 import { AnswerEntity } from './answer.entity.js';
+import { AttachmentEntity } from './attachment.entity.js';
+import { AttachmentPartEntity } from './attachment-part.entity.js';
+import { AttachmentWordsEntity } from './attachment-words.entity.js';
 import { AuditEventEntity } from './audit-event.entity.js';
 import { CalendarVersionEntity } from './calendar-version.entity.js';
 import { CalendarEntity } from './calendar.entity.js';
@@ -35,4 +38,7 @@ export const ENTITIES = [
   AuditEventEntity,
   LetterEntity,
   LetterChoiceEntity,
+  AttachmentEntity,
+  AttachmentPartEntity,
+  AttachmentWordsEntity,
 ];

@@ -2,6 +2,7 @@ import { FirstSchema1796000000000 } from './1796000000000-first-schema.js';
 import { Letters1796200000000 } from './1796200000000-letters.js';
 import { Figures1796400000000 } from './1796400000000-figures.js';
 import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
+import { Attachments1797200000000 } from './1797200000000-attachments.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -9,4 +10,5 @@ export const MIGRATIONS = [
   Letters1796200000000,
   Figures1796400000000,
   RainMonths1797000000000,
+  Attachments1797200000000,
 ];

@@ -1,7 +1,7 @@
 import type { AuditEvent } from '#shared/contracts/audit.js';
 import type { PageQuery } from '#shared/contracts/common.js';
 import type { DataSource } from 'typeorm';
-import type { Actor } from '../../http/actor.js';
+import { hasRole, type Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
 import { personNames } from '../people/person-names.service.js';
 import { toAuditEvent } from './audit.mapper.js';
@@ -21,7 +21,12 @@ export class AuditListService {
   async list(actor: Actor, { cursor, limit = PAGE_LENGTH }: PageQuery): Promise<AuditPage> {
     if (cursor !== undefined && !/^\d{1,19}$/u.test(cursor)) throw invalidField('cursor', 'unknown');
     const { manager } = this.dataSource;
-    const rows = await auditPage(manager, actor.communityId, cursor ?? null, limit + 1);
+    const reader = {
+      communityId: actor.communityId,
+      personId: actor.person.id,
+      isElder: hasRole(actor, 'elder'),
+    };
+    const rows = await auditPage(manager, reader, cursor ?? null, limit + 1);
     const page = rows.slice(0, limit);
     const actors = await personNames(
       manager,

@@ -1,4 +1,4 @@
-import { In, LessThan, type EntityManager } from 'typeorm';
+import { In, LessThan, Raw, type EntityManager } from 'typeorm';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -10,15 +10,27 @@ import { personNames } from '../people/person-names.service.js';
 
 type SubjectType = AuditEventEntity['subjectType'];
 
+/** Rows about what is for the elders alone are for elders, and for whoever did it. */
+const FOR_EVERY_KEEPER = Raw(
+  (column) => `COALESCE(JSON_VALUE(${column}, '$.level'), 'village') IN ('open', 'village')`,
+);
+
 /** Newest first, from before the given sequence on. */
 export async function auditPage(
   manager: EntityManager,
-  communityId: string,
+  reader: { communityId: string; personId: string; isElder: boolean },
   before: string | null,
   limit: number,
 ): Promise<AuditEventEntity[]> {
+  const { communityId, personId, isElder } = reader;
+  const older = before === null ? { communityId } : { communityId, sequence: LessThan(before) };
   return manager.find(AuditEventEntity, {
-    where: before === null ? { communityId } : { communityId, sequence: LessThan(before) },
+    where: isElder
+      ? older
+      : [
+          { ...older, details: FOR_EVERY_KEEPER },
+          { ...older, actorId: personId },
+        ],
     order: { sequence: 'DESC' },
     take: limit,
   });
@@ -53,6 +65,8 @@ const NAMES: Readonly<
         ({ id, place, year }) => [id, `${place.name} ${year}`],
       ),
     ),
+  /** What it is called is for those who may hear or see it. */
+  attachment: () => Promise.resolve(new Map<string, string>()),
   version: async (manager, ids) =>
     new Map(
       (

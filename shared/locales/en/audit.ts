@@ -24,6 +24,10 @@ export const texts = {
     'figure-changed': '{{actor}} changed the figure {{subject}}: {{fields}}.',
     'figure-taken-out': '{{actor}} took the figure {{subject}} out.',
     'figure-put-back': '{{actor}} put the figure {{subject}} back.',
+    'attachment-added': '{{actor}} added {{what}}.',
+    'attachment-opened': '{{actor}} opened {{what}} that is not for everybody.',
+    'attachment-words-written': '{{actor}} wrote out the words of {{what}}.',
+    'attachment-removed': '{{actor}} removed {{what}}.',
     'calendar-begun': '{{actor}} began the calendar {{subject}}.',
     'entry-added': '{{actor}} added the entry “{{subject}}”.',
     'entry-changed': '{{actor}} changed the entry “{{subject}}”: {{fields}}.',
@@ -42,6 +46,10 @@ export const texts = {
     published: '{{actor}} published {{label}} of {{subject}}.',
     replaced: '{{label}} of {{subject}} is replaced by {{by}}.',
     recalled: '{{actor}} recalled {{label}} of {{subject}}.',
+  },
+  attachment: {
+    recording: 'a recording',
+    picture: 'a picture',
   },
   reason: {
     'taken-back': 'taken back',

@@ -21,6 +21,7 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
     role: roles([details['role']]),
     fields: list(asTexts(details['fields']).map((field) => t(`audit:field.${asField(field)}`))),
     number: asText(details['number']),
+    what: t(`audit:attachment.${details['kind'] === 'picture' ? 'picture' : 'recording'}`),
     label: asText(details['label']),
     by: asText(details['by']),
     reason:
