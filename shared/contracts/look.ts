@@ -6,6 +6,8 @@ import {
   MOON_SHAPES,
   MOONLIGHTS,
   NAKED_EYE_PLANETS,
+  SIGHT_FALLBACKS,
+  SIGHT_RULES,
   PHENOMENON_OUTCOMES,
   SKY_NOTES,
   STAR_OUTCOME_DETAILS,
@@ -96,6 +98,22 @@ export type LookSeason = z.infer<typeof lookSeason>;
 export const lookAlternative = z.strictObject({ marker: markerNames, days: occurrenceDays });
 export type LookAlternative = z.infer<typeof lookAlternative>;
 
+/** What the seen part of the path goes by. */
+export const lookSight = z.strictObject({
+  by: z.enum(SIGHT_RULES),
+  /** Why it goes by the rule of the dates; null where it goes by the model of visibility. */
+  because: z.enum(SIGHT_FALLBACKS).nullable(),
+  /** Magnitudes by which eyes are taken keener than the model has them; this and what follows null by the rule of the dates. */
+  offsetMag: z.number().nullable(),
+  /** The day that set the model: on it the star just shows. */
+  phenomenon: phenomenon.nullable(),
+  expectedDate: isoDate.nullable(),
+  /** When the model left to itself would show the star in this watch; both null where not at all. */
+  plainFromAt: localTime.nullable(),
+  plainToAt: localTime.nullable(),
+});
+export type LookSight = z.infer<typeof lookSight>;
+
 export const look = z.strictObject({
   placeId: id,
   placeName: z.string(),
@@ -122,6 +140,7 @@ export const look = z.strictObject({
   seenMinutes: z.number().int(),
   best: lookMoment.nullable(),
   path: z.array(lookMoment),
+  sight: lookSight,
   pointers: z.array(lookPointer),
   planets: z.array(lookPlanet),
   moon: lookMoon.nullable(),

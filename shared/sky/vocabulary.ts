@@ -68,6 +68,14 @@ export type SunCourse = (typeof SUN_COURSES)[number];
 export const LOOK_OUTCOMES = ['seen', 'too-light', 'not-up', 'never-clears-skyline', 'sun-stays-up'] as const;
 export type LookOutcome = (typeof LOOK_OUTCOMES)[number];
 
+/** What a watch is drawn by: the model of visibility, set by the expected day, or the rule of the dates. */
+export const SIGHT_RULES = ['model', 'dates'] as const;
+export type SightRuleWord = (typeof SIGHT_RULES)[number];
+
+/** Why a watch goes by the rule of the dates: no day to set the model by, the star not up in that day's watch, or an offset out of bounds. */
+export const SIGHT_FALLBACKS = ['no-day', 'not-in-watch', 'too-far'] as const;
+export type SightFallback = (typeof SIGHT_FALLBACKS)[number];
+
 export const NAKED_EYE_PLANETS = ['mercury', 'venus', 'mars', 'jupiter', 'saturn'] as const;
 export type NakedEyePlanet = (typeof NAKED_EYE_PLANETS)[number];
 

@@ -73,6 +73,17 @@ describe('a first morning of the Pleiades over the hills', () => {
     expect(answer.skyline).toEqual(place.skyline);
   });
 
+  it('goes by the model of visibility, set by that day, with the model’s own opinion beside it', async () => {
+    const { sight, date } = await look({});
+    expect(sight).toMatchObject({
+      by: 'model',
+      because: null,
+      phenomenon: 'heliacal-rising',
+      expectedDate: date,
+    });
+    expect(Math.abs(sight.offsetMag ?? NaN)).toBeLessThan(3);
+  });
+
   it('names Venus, which stands beside it and is brighter, and stars to start from', async () => {
     const { planets, pointers, moon } = await look({ date: '2027-06-08' });
     expect(planets.map(({ planet, isBrighter }) => ({ planet, isBrighter }))).toEqual([

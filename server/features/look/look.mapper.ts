@@ -7,12 +7,14 @@ import type {
   LookPlanet,
   LookPointer,
   LookSeason,
+  LookSight,
 } from '#shared/contracts/look.js';
 import { isoDateOf } from '#shared/kernel/iso-date.js';
 import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type {
   Look as SkyLook,
   LookMoment as SkyMoment,
+  LookSight as SkySight,
   MoonThen,
   Phenomenon,
   PlanetBeside,
@@ -55,17 +57,45 @@ export function toLook({ place, phenomenon, sky, season, alternative }: LookFact
     watchToAt: time(sky.watchToJdUt),
     comesUp: toCrossing(sky.comesUpJdUt, sky, place),
     goesDown: toCrossing(sky.goesDownJdUt, sky, place),
-    seenFromAt: time(sky.seenFromJdUt, 'up'),
-    seenToAt: time(sky.seenToJdUt),
+    ...spanAt(sky.seenFromJdUt, sky.seenToJdUt, place),
     seenMinutes: seenMinutesOf(sky),
     best: sky.best && toMoment(sky.best, place),
     path: sky.path.map((moment) => toMoment(moment, place)),
+    sight: toSight(sky.sight, place),
     pointers: sky.pointers.map(toPointer),
     planets: sky.planets.map((planet) => toPlanet(planet, place)),
     moon: sky.moon && toMoon(sky.moon),
     season,
     alternative,
     engineVersion: ENGINE_VERSION,
+  };
+}
+
+/** Whole minutes within a stretch of time; the minute of its end where it holds none. */
+function spanAt(
+  fromJdUt: number | null,
+  toJdUt: number | null,
+  clock: PlaceClock,
+): { seenFromAt: string | null; seenToAt: string | null } {
+  if (fromJdUt === null || toJdUt === null) return { seenFromAt: null, seenToAt: null };
+  const seenToAt = localTimeOf(toJdUt, clock, 'down');
+  const isShort = (toJdUt - fromJdUt) * MINUTES_PER_DAY < 1;
+  return { seenFromAt: isShort ? seenToAt : localTimeOf(fromJdUt, clock, 'up'), seenToAt };
+}
+
+function toSight(
+  { by, because, offsetMag, phenomenon, expectedDayNumber, plainFromJdUt, plainToJdUt }: SkySight,
+  clock: PlaceClock,
+): LookSight {
+  const { seenFromAt, seenToAt } = spanAt(plainFromJdUt, plainToJdUt, clock);
+  return {
+    by,
+    because,
+    offsetMag,
+    phenomenon,
+    expectedDate: expectedDayNumber === null ? null : isoDateOf(expectedDayNumber),
+    plainFromAt: seenFromAt,
+    plainToAt: seenToAt,
   };
 }
 

@@ -76,6 +76,28 @@ export const texts = {
     },
   },
 
+  /** What the thick part of the path goes by. */
+  sight: {
+    show: 'How the thick line is reckoned',
+    model:
+      'By a model of light, air and eyes, minute by minute. It is set so that {{marker}} just shows on the day that the village’s rule gives: {{phenomenon}}, about {{day}}.',
+    keener:
+      'For that, eyes count as keener than the model has them by {{mag}} magnitudes; one magnitude is two and a half times the light.',
+    duller:
+      'For that, eyes count as less keen than the model has them by {{mag}} magnitudes; one magnitude is two and a half times the light.',
+    even: 'For that, next to nothing had to be changed in it.',
+    plain: 'Left to itself the model would show it from {{from}} to {{to}} in this watch.',
+    plainNone: 'Left to itself the model would not show it in this watch.',
+    dates: {
+      'no-day':
+        'By the village’s rule for dates. The star has no first or last day here on this side of the night, so the model of light, air and eyes could not be set by it.',
+      'not-in-watch':
+        'By the village’s rule for dates. On its own day the star is not up while people can look, so the model of light, air and eyes could not be set by it.',
+      'too-far':
+        'By the village’s rule for dates. For this star the model of light, air and eyes is too far from that rule here to be set by it: trust neither alone, and look on several days.',
+    },
+  },
+
   pointers: {
     title: 'Start from',
     one: '<b>{{name}}</b>, in the {{compass}}: from it go {{hands}} {{way}}.',

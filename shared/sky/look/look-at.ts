@@ -2,12 +2,15 @@ import type { MarkerAtPlace } from '../markers/place-year.js';
 import type { Site } from '../types.js';
 import { monthOfDay } from '../time/civil-year.js';
 import { clarityOfMonth } from '../visibility/clarity.js';
+import { airAtPlace } from '../visibility/air.js';
+import { type Calibration, calibrationOf } from './calibration.js';
 import { lookPathOf, type LookPath } from './look-path.js';
 import type { LookOutcome, WatchSide } from '../vocabulary.js';
-import type { Look } from './look-types.js';
+import type { Look, LookSight } from './look-types.js';
 import { moonThen } from './moon-then.js';
 import { planetsBeside, type StarThen } from './planets-beside.js';
 import { pointersOf } from './pointers.js';
+import { type Sight, sightByDates, sightByModel } from './sight.js';
 import type { SightRule } from './sight-rule.js';
 import { skyAt } from './sky-at.js';
 import { watchWindowOf, type WatchWindow } from './watch-window.js';
@@ -19,7 +22,8 @@ import { watchWindowOf, type WatchWindow } from './watch-window.js';
  */
 export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, side: WatchSide): Look {
   const { year, ground, settings, clock } = marker;
-  const clarity = clarityOfMonth(settings.clarityByMonth, monthOfDay(dayNumber, year.civil.calendar));
+  const month = monthOfDay(dayNumber, year.civil.calendar);
+  const clarity = clarityOfMonth(settings.clarityByMonth, month);
   const rule: SightRule = {
     threshold: marker.threshold,
     sameSideShiftDeg: settings.sameSideShiftDeg,
@@ -28,7 +32,16 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
   };
   const meanNoonJdUt = dayNumber - site.longitudeDeg / 360;
   const window = watchWindowOf(year, ground, dayNumber - clock.offsetDays(meanNoonJdUt), side);
-  const path = window.span === null ? null : lookPathOf(marker, rule, window.span);
+  const calibration = calibrationOf(marker, site, dayNumber, side);
+  const model = (offsetMag: number): Sight =>
+    sightByModel(airAtPlace(site, month, clarity), marker.marker.vMag, offsetMag);
+  const sight =
+    calibration.by === 'model' ? model(calibration.offsetMag) : sightByDates(rule, marker.marker.vMag);
+  const path = window.span && lookPathOf(marker, sight, clarity, window.span);
+  const plain =
+    window.span && calibration.by === 'model'
+      ? lookPathOf(marker, model(0), clarity, window.span).seen
+      : null;
   const middleJdUt = window.span === null ? meanNoonJdUt : (window.span.fromJdUt + window.span.toJdUt) / 2;
   const bestJdUt = path?.best?.jdUt ?? null;
   const then = bestJdUt === null ? null : thenOf(marker, bestJdUt);
@@ -49,6 +62,7 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
     seenToJdUt: path?.seen?.toJdUt ?? null,
     best: path?.best ?? null,
     path: path?.moments ?? [],
+    sight: lookSightOf(calibration, plain),
     pointers: then === null ? [] : pointersOf(marker, rule, then.sky, then.star),
     planets:
       then === null || path === null
@@ -58,6 +72,19 @@ export function lookAt(marker: MarkerAtPlace, site: Site, dayNumber: number, sid
       window.span === null
         ? null
         : moonThen(site, then?.sky ?? skyAt(year, ground, middleJdUt), then?.star ?? null),
+  };
+}
+
+function lookSightOf(calibration: Calibration, plain: LookPath['seen']): LookSight {
+  const set = calibration.by === 'model' ? calibration : null;
+  return {
+    by: calibration.by,
+    because: calibration.by === 'dates' ? calibration.because : null,
+    offsetMag: set?.offsetMag ?? null,
+    phenomenon: set?.phenomenon ?? null,
+    expectedDayNumber: set?.expectedDayNumber ?? null,
+    plainFromJdUt: plain?.fromJdUt ?? null,
+    plainToJdUt: plain?.toJdUt ?? null,
   };
 }
 

@@ -1,7 +1,9 @@
 import type { MarkerAtPlace } from '../markers/place-year.js';
 import { DEG_PER_RAD } from '../units/angle.js';
+import type { Clarity } from '../vocabulary.js';
 import type { LookMoment } from './look-types.js';
-import { isSeen, neededForSightDeg, type SightRule } from './sight-rule.js';
+import { extinctionAngleDeg } from './extinction-angle.js';
+import type { Sight } from './sight.js';
 import { skyAt } from './sky-at.js';
 
 /** A star's way through one watch. */
@@ -19,13 +21,23 @@ const SCAN_DAYS = 1 / 1440;
 const KEPT_EVERY = 5;
 const PRECISION_DAYS = 1 / 86_400;
 
-/** @param span stretch of time, JD UT */
+/** A moment with what is to spare in it; only the path knows that. */
+interface Scanned extends LookMoment {
+  spare: number;
+}
+
+/**
+ * @param sight whether the sky is dark enough; below the thick air's top the star is not seen whatever it says
+ * @param span stretch of time, JD UT
+ */
 export function lookPathOf(
   marker: MarkerAtPlace,
-  rule: SightRule,
+  sight: Sight,
+  clarity: Clarity,
   span: { fromJdUt: number; toJdUt: number },
 ): LookPath {
-  const momentAt = (jdUt: number): LookMoment => momentOf(marker, rule, jdUt);
+  const lowestDeg = extinctionAngleDeg(marker.marker.vMag, clarity);
+  const momentAt = (jdUt: number): Scanned => momentOf(marker, sight, lowestDeg, jdUt);
   const count = Math.max(1, Math.ceil((span.toJdUt - span.fromJdUt) / SCAN_DAYS));
   const scanned = Array.from({ length: count + 1 }, (_, index) =>
     momentAt(span.fromJdUt + ((span.toJdUt - span.fromJdUt) * index) / count),
@@ -33,7 +45,7 @@ export function lookPathOf(
   const seen = seenSpan(scanned, momentAt);
   const middle = seen === null ? null : momentAt((seen.fromJdUt + seen.toJdUt) / 2);
   // A hill may stand in the middle of what is seen.
-  const best = middle?.isUp === true ? middle : leastMissing(marker, rule, scanned);
+  const best = middle?.isUp === true ? middle : leastMissing(scanned);
   const named = [seen?.fromJdUt, seen?.toJdUt].flatMap((jdUt) =>
     jdUt === undefined ? [] : [momentAt(jdUt)],
   );
@@ -41,23 +53,29 @@ export function lookPathOf(
   const moments = [...kept, ...named, ...(best === null ? [] : [best])]
     .sort((a, b) => a.jdUt - b.jdUt)
     .filter(({ jdUt }, index, all) => jdUt !== all[index - 1]?.jdUt);
-  return { moments, seen, best };
+  return { moments: moments.map(bare), seen, best: best && bare(best) };
 }
 
-function momentOf(marker: MarkerAtPlace, rule: SightRule, jdUt: number): LookMoment {
+function bare({ spare: _spare, ...moment }: Scanned): LookMoment {
+  return moment;
+}
+
+function momentOf(marker: MarkerAtPlace, sight: Sight, lowestDeg: number, jdUt: number): Scanned {
   const sky = skyAt(marker.year, marker.ground, jdUt);
   const star = sky.starAt(marker.year.stars.placeOf(marker.marker.starRef));
   const above = sky.aboveSkylineRad(star);
-  const sunward = star.azimuthRad - sky.sunAzimuthRad;
+  const altitudeDeg = star.altitudeRad * DEG_PER_RAD;
+  const spare = sight.spare(sky, star);
   const isUp = above >= 0;
   return {
     jdUt,
     azimuthDeg: star.azimuthRad * DEG_PER_RAD,
-    altitudeDeg: star.altitudeRad * DEG_PER_RAD,
+    altitudeDeg,
     aboveSkylineDeg: above * DEG_PER_RAD,
     sunDepressionDeg: sky.sunDepressionDeg,
     isUp,
-    isSeen: isUp && isSeen(rule, marker.marker.vMag, star.altitudeRad, sunward, sky.sunDepressionDeg),
+    isSeen: isUp && altitudeDeg >= lowestDeg && spare >= 0,
+    spare,
   };
 }
 
@@ -82,23 +100,11 @@ function seenSpan(scanned: readonly LookMoment[], momentAt: (jdUt: number) => Lo
   };
 }
 
-/** The moment over the skyline at which the Sun comes nearest to the depth that is needed. */
-function leastMissing(
-  marker: MarkerAtPlace,
-  rule: SightRule,
-  scanned: readonly LookMoment[],
-): LookMoment | null {
-  let best: LookMoment | null = null;
-  let bestMargin = Number.NEGATIVE_INFINITY;
+/** The moment over the skyline at which the star comes nearest to showing. */
+function leastMissing(scanned: readonly Scanned[]): Scanned | null {
+  let best: Scanned | null = null;
   for (const moment of scanned) {
-    if (!moment.isUp) continue;
-    const sky = skyAt(marker.year, marker.ground, moment.jdUt);
-    const sunward = moment.azimuthDeg / DEG_PER_RAD - sky.sunAzimuthRad;
-    const needed = neededForSightDeg(rule, marker.marker.vMag, moment.altitudeDeg, sunward);
-    const margin = moment.sunDepressionDeg - needed;
-    if (margin <= bestMargin) continue;
-    best = moment;
-    bestMargin = margin;
+    if (moment.isUp && (best === null || moment.spare > best.spare)) best = moment;
   }
   return best;
 }

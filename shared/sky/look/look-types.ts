@@ -5,6 +5,9 @@ import type {
   Moonlight,
   MoonShape,
   NakedEyePlanet,
+  Phenomenon,
+  SightFallback,
+  SightRuleWord,
   StarOutcomeDetail,
   SunCourse,
   WatchSide,
@@ -68,6 +71,21 @@ export interface MoonThen {
   moonlight: Moonlight;
 }
 
+/** What the seen part of a path goes by. */
+export interface LookSight {
+  by: SightRuleWord;
+  /** Why it goes by the rule of the dates; null where it goes by the model. */
+  because: SightFallback | null;
+  /** Magnitudes by which eyes are taken keener than the model has them, −3…3; null by the rule of the dates. */
+  offsetMag: number | null;
+  /** The day that set the model: on it the best moment just shows the star. Null by the rule of the dates. */
+  phenomenon: Phenomenon | null;
+  expectedDayNumber: number | null;
+  /** When the model left to itself would show the star in this watch; null where not at all, and by the rule of the dates. */
+  plainFromJdUt: number | null;
+  plainToJdUt: number | null;
+}
+
 /** Where and when to look for a marker on one morning or evening. */
 export interface Look {
   markerKey: MarkerKey;
@@ -91,6 +109,7 @@ export interface Look {
   best: LookMoment | null;
   /** In order of time, the moments named above among them. Empty where the Sun stays up. */
   path: readonly LookMoment[];
+  sight: LookSight;
   pointers: readonly Pointer[];
   planets: readonly PlanetBeside[];
   /** Null where the Sun stays up. */

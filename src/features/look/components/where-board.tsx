@@ -9,6 +9,7 @@ import { lookCardUrl } from '../api/look-query.js';
 import { useLookWords } from '../model/use-look-words.js';
 import { SkyPicture } from './sky-picture.js';
 import { PathTable } from './path-table.js';
+import { SightNote } from './sight-note.js';
 
 /** Where it stands at the best moment, drawn over the place's skyline, and from when to when. */
 export function WhereBoard({ look }: { look: Look }) {
@@ -18,7 +19,12 @@ export function WhereBoard({ look }: { look: Look }) {
       <Outcome look={look} />
       {look.best !== null && <SkyPicture look={look} best={look.best} />}
       <Times look={look} />
-      {look.path.some(({ isUp }) => isUp) && <PathTable look={look} />}
+      {look.path.some(({ isUp }) => isUp) && (
+        <>
+          <PathTable look={look} />
+          <SightNote look={look} />
+        </>
+      )}
       {look.best !== null && (
         <ButtonAnchor
           className="mt-3"

@@ -54,6 +54,23 @@ describe('where to look on a first morning', () => {
     expect(within(table).getAllByText('behind the skyline').length).toBeGreaterThan(2);
   });
 
+  it('says what the thick line goes by, what had to be changed for it and what the model says by itself', async () => {
+    const { user } = await open('marker=pleiades&date=2027-06-10');
+    await user.click(await screen.findByText('How the thick line is reckoned'));
+    expect(plain()).toMatch(
+      /set so that Pleiades just shows on the day that the village’s rule gives: first morning seen, about \d+ June 2027/,
+    );
+    expect(plain()).toMatch(/by [\d.]+ magnitudes;|next to nothing/);
+    expect(plain()).toMatch(/Left to itself the model would (?:not show it|show it from)/);
+  });
+
+  it('says why a star without such a day goes by the rule of the dates', async () => {
+    const north = { ...TAZIMEL, latitudeDeg: 66, longitudeDeg: 23, timeZone: 'Europe/Stockholm' };
+    const { user } = await open('marker=hr7001&date=2027-11-10', north);
+    await user.click(await screen.findByText('How the thick line is reckoned'));
+    expect(plain()).toContain('By the village’s rule for dates. The star has no first or last day here');
+  });
+
   it('names the planet beside it, stars to start from, the Moon and the season', async () => {
     await open('marker=pleiades&date=2027-06-10');
     await screen.findByText('Not to be taken for it');
