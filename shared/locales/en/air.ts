@@ -24,9 +24,9 @@ export const texts = {
   },
   width: {
     scatter:
-      'The range allows for {{half}}° of the Sun’s depth to either side: so far published sightings scatter. Air and eyes alone, by the model, would ask for {{model}}° here in that month.',
+      'The range allows for {{half}}° of the Sun’s depth to either side, as far as published sightings scatter. For clearer and hazier air and for other eyes the model would ask for {{model}}° here in that month.',
     model:
-      'The range allows for {{half}}° of the Sun’s depth to either side: so much air and eyes ask for here in that month, by the model. Published sightings scatter by {{scatter}}°.',
+      'The range allows for {{half}}° of the Sun’s depth to either side: so much the model asks for here in that month, for clearer and hazier air and for other eyes. Published sightings scatter by {{scatter}}°.',
   },
   noRule: {
     'none-in-this-year': 'The village’s rule has no such day in {{year}}.',

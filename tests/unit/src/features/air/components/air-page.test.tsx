@@ -74,7 +74,7 @@ describe('the page of other air', () => {
   it('says where the width of the range comes from', async () => {
     await open('hr2491');
     expect(plain(board('First morning seen'))).toContain(
-      'The range allows for 1.5° of the Sun’s depth to either side: so far published sightings scatter.',
+      'The range allows for 1.5° of the Sun’s depth to either side, as far as published sightings scatter.',
     );
   });
 
