@@ -39,7 +39,9 @@ type VersionNumber = number | 'draft';
 interface MarkerQuery {
   marker?: string | undefined;
   phenomenon?: string | undefined;
-  /** Which of two such days in the year; left out for the first. */
+  /** A sign of the sky instead, as JSON. */
+  sky?: string | undefined;
+  /** Which of such days in the year; left out for the first. */
   occurrence?: number | undefined;
 }
 

@@ -109,8 +109,6 @@ export const texts = {
     exists: 'There is a calendar of {{year}} for {{place}} already.',
     openExisting: 'Open that calendar',
     chooseFor: 'Which calendar shall go by it?',
-    chooseForSecond: '{{marker}}, {{phenomenon}}, the second time in the year',
-    chooseForUnder: '{{marker}}: {{phenomenon}}',
     newEntryHere: 'Put it in here',
     putInto: 'Put it into the calendar of {{year}} for {{place}}',
     lockedForNow: 'Locked while submission {{number}} is out',

@@ -20,6 +20,7 @@ export const texts = {
     year: 'In the year',
     oldMarker: 'We used to go by',
     oldMarkerHint: 'Type a name or a letter, such as Pleiades or Sirius.',
+    namesTrouble: 'The names of stars and figures did not come through',
     its: 'Its',
     since: 'Since about the year',
     sinceHint: 'A guess will do: in a hundred years a star moves a day or two.',
@@ -179,10 +180,19 @@ export const texts = {
     after_one: 'The next sign after: {{sign}}. {{day}}, {{count}} day after your day.',
     after_other: 'The next sign after: {{sign}}. {{day}}, {{count}} days after your day.',
     use: 'Count the days from it',
-    sun: 'The Sun itself: where it comes up or goes down on your skyline moves fastest in spring and autumn, and turns at the solstices. Solstices, equinoxes, the first dark night and the Moons serve as well: in the entry, choose them under “Sun and sky”.',
+    further: 'And further off',
+    sun: 'The Sun on your skyline: where it comes up or goes down moves fastest in spring and autumn. The entry asks for the point under “Sun and sky”, and for Moons too.',
     land: 'Signs of the land: birds that arrive, buds, ice, first rain. Write them in the entry under “Signs”; two together are better than one.',
     fixed: 'A fixed date of the responsible office, where there is one.',
     tryAll: 'Look through the faint stars too',
+  },
+
+  signs: {
+    title: 'Sun, nights and stars at an hour',
+    line: 'Signs of the sky near your days',
+    trouble: 'The signs of the sky did not come through. They stand in the entry under “Sun and sky” too.',
+    tieOf: 'Tie work to this sign: {{sign}}',
+    takeOf: 'Take this sign for the entry: {{sign}}',
   },
 
   years: {

@@ -65,9 +65,23 @@ export function contentOf(draft: EntryDraft): EntryInput {
   };
 }
 
+type WantedLead = MarkerLead | SkyLead;
+
+/** The part of a draft that a wanted marker sets; without one, a star is still to be chosen. */
+function withLead(wanted: WantedLead | null): Pick<EntryDraft, 'leadType' | 'marker' | 'sky'> {
+  return { leadType: 'marker', marker: NO_MARKER, sky: NO_SKY, ...(wanted && leadPatch(wanted)) };
+}
+
+/** Makes a marker the lead of a draft; what else could lead it stays. */
+export function leadPatch(wanted: WantedLead): Partial<Pick<EntryDraft, 'leadType' | 'marker' | 'sky'>> {
+  const { type, ...lead } = wanted;
+  return 'spec' in lead ? { leadType: type, sky: lead } : { leadType: type, marker: lead };
+}
+
 /** A new entry; on the star's page a person may have chosen what it goes by. */
-export function newDraft(marker: EntryDraft['marker'] | null = null): EntryDraft {
+export function newDraft(wanted: WantedLead | null = null): EntryDraft {
   return {
+    ...withLead(wanted),
     titleVillage: '',
     titleOfficer: '',
     kind: 'farm',
@@ -75,9 +89,6 @@ export function newDraft(marker: EntryDraft['marker'] | null = null): EntryDraft
     crop: '',
     notes: '',
     caution: '',
-    leadType: 'marker',
-    marker: marker ?? NO_MARKER,
-    sky: NO_SKY,
     fixed: NO_FIXED,
     offsets: FIRST_OFFSETS,
     hasLastDate: false,

@@ -35,11 +35,12 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
   const signs = useSigns(
     placeId,
     year,
-    // Those being written, and those saved: the open one shows all of its days in the year.
+    // Those being written, one that a new entry shall go by, and those saved: the open one shows all of its days.
     useMemo(() => {
       const written = [...writing.values()].map(({ draft }) => contentOf(draft));
-      return specsOf([...(entries.data ?? []).map(({ content }) => content), ...written]);
-    }, [writing, entries.data]),
+      const saved = (entries.data ?? []).map(({ content }) => content);
+      return specsOf([...saved, ...written, contentOf(newStart)]);
+    }, [writing, entries.data, newStart]),
   );
   const saved = useMemo(() => entries.data ?? [], [entries.data]);
   const shown = useMemo(

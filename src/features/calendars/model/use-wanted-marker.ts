@@ -1,5 +1,6 @@
 import { useEffect, useRef } from 'react';
 import { useSearchParams } from 'react-router-dom';
+import { leadPatch } from './entry-draft.js';
 import type { Editor } from './use-editor.js';
 
 /**
@@ -18,10 +19,7 @@ export function useWantedMarker(editor: Editor): void {
     seen.current = arrival;
     const isWritten = selected.saved !== null || edits.all.has(selected.id);
     if (!canWrite || !isWritten) return;
-    edits.change(selected.id, selected.saved ?? newStart, {
-      leadType: 'marker',
-      marker: wanted,
-    });
+    edits.change(selected.id, selected.saved ?? newStart, leadPatch(wanted));
     setSearch({ entry: selected.id }, { replace: true, preventScrollReset: true });
   }, [search, wanted, selected, openId, canWrite, edits, newStart, setSearch]);
 }

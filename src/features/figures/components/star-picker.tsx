@@ -96,34 +96,37 @@ export function StarPicker(props: StarPickerProps) {
         {t(onPatch === null ? 'picker.howStars' : 'picker.howPatch')}
       </p>
       <div className="flex flex-wrap items-center gap-2">
-        <IconButton
-          label={t('picker.east')}
-          icon={<ArrowLeft aria-hidden size={22} />}
-          onClick={() => {
-            go(-1, 0);
-          }}
-        />
-        <IconButton
-          label={t('picker.north')}
-          icon={<ArrowUp aria-hidden size={22} />}
-          onClick={() => {
-            go(0, -1);
-          }}
-        />
-        <IconButton
-          label={t('picker.south')}
-          icon={<ArrowDown aria-hidden size={22} />}
-          onClick={() => {
-            go(0, 1);
-          }}
-        />
-        <IconButton
-          label={t('picker.west')}
-          icon={<ArrowRight aria-hidden size={22} />}
-          onClick={() => {
-            go(1, 0);
-          }}
-        />
+        {/* The picture keeps east to the left on every page; its arrows go with it. */}
+        <div dir="ltr" className="flex flex-wrap gap-2">
+          <IconButton
+            label={t('picker.east')}
+            icon={<ArrowLeft aria-hidden size={22} />}
+            onClick={() => {
+              go(-1, 0);
+            }}
+          />
+          <IconButton
+            label={t('picker.north')}
+            icon={<ArrowUp aria-hidden size={22} />}
+            onClick={() => {
+              go(0, -1);
+            }}
+          />
+          <IconButton
+            label={t('picker.south')}
+            icon={<ArrowDown aria-hidden size={22} />}
+            onClick={() => {
+              go(0, 1);
+            }}
+          />
+          <IconButton
+            label={t('picker.west')}
+            icon={<ArrowRight aria-hidden size={22} />}
+            onClick={() => {
+              go(1, 0);
+            }}
+          />
+        </div>
         <IconButton
           label={t('picker.nearer')}
           icon={<Plus aria-hidden size={22} />}

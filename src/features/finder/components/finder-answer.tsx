@@ -9,6 +9,7 @@ import { FoundCards } from './found-cards.js';
 import { FoundTable } from './found-table.js';
 import { NoMarker } from './no-marker.js';
 import { OldMarkerBoard } from './old-marker-board.js';
+import { SkySignsFold } from './sky-signs.js';
 import { useFoundWords } from './use-found-words.js';
 import { YearsBoard } from './years-board.js';
 
@@ -61,6 +62,7 @@ export function FinderAnswerView(props: FinderAnswerViewProps) {
           ) : (
             <FoundCards good={good} careful={careful} />
           )}
+          {good.length > 0 && <SkySignsFold />}
           {good.length > 0 && <YearsBoard items={good} />}
           <Care>
             <p>{t('notWeather')}</p>

@@ -3,8 +3,8 @@ import { Plus } from 'lucide-react';
 import { useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
-import type { FoundMarker } from '#shared/contracts/finder.js';
 import type { Place } from '#shared/contracts/places.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { useCurrentPlace, useRoles } from '#src/lib/community.js';
 import { todayIn } from '#src/lib/days.js';
 import { usePageTitle } from '#src/lib/page-title.js';
@@ -25,6 +25,7 @@ import {
   type Question,
 } from '../model/finder-question.js';
 import { FinderAnswerView } from './finder-answer.js';
+import type { Sign } from './finder-context.js';
 import { QuestionBoard } from './question-board.js';
 
 /** From "we used to start when …" to a well-founded marker: one question, and the signs that answer it. */
@@ -112,11 +113,13 @@ function FinderAtPlace({ place }: { place: Place }) {
   );
 }
 
-type Sign = Pick<FoundMarker, 'markerKey' | 'phenomenon' | 'occurrence'>;
-
 /** Into the entry that asked, or to the choice of a calendar for a new one. */
-function takePathOf({ markerKey, phenomenon, occurrence }: Sign, forEntry: ForEntry | null): string {
-  const marker = { marker: markerKey, phenomenon, occurrence: occurrence === 1 ? undefined : occurrence };
+function takePathOf(sign: Sign, forEntry: ForEntry | null): string {
+  const occurrence = sign.occurrence === 1 ? undefined : sign.occurrence;
+  const marker =
+    'spec' in sign
+      ? { sky: canonicalJson(sign.spec), occurrence }
+      : { marker: sign.markerKey, phenomenon: sign.phenomenon, occurrence };
   if (forEntry === null) return paths.calendars(marker);
   const { calendarId, entryId } = forEntry;
   return paths.calendar(calendarId, { entry: entryId ?? 'new', ...marker });

@@ -6,6 +6,7 @@ import { markerName } from '#src/lib/marker-names.js';
 import { Button, ButtonLink } from '#src/ui/button.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useFinderFacts } from './finder-context.js';
+import { SkySigns } from './sky-signs.js';
 
 /** Nights above this depth keep even bright stars out of sight near the ground. */
 const LIGHT_NIGHT_DEG = 12;
@@ -34,6 +35,9 @@ export function NoMarker({ isAll, onShowAll }: { isAll: boolean; onShowAll: () =
         <p className="mt-2">{t('none.counts', { reasons: listWords(reasons, i18n.language) })}</p>
       )}
       <h3 className="mt-4">{t('none.instead')}</h3>
+      <h4 className="mt-3 mb-2">{t('signs.title')}</h4>
+      <SkySigns />
+      <h4 className="mt-4">{t('none.further')}</h4>
       <ul className="mt-2 grid list-disc gap-2 ps-5">
         {nearest.before !== null && <Nearest sign={nearest.before} text="before" />}
         {nearest.after !== null && <Nearest sign={nearest.after} text="after" />}
@@ -63,9 +67,11 @@ function Nearest({ sign, text }: { sign: NearestMarker; text: 'before' | 'after'
         count: Math.abs(sign.daysAway),
       })}
       {takePath !== null && (
-        <ButtonLink look="quiet" className="-ms-2" to={takePath(sign)}>
-          {t('none.use')}
-        </ButtonLink>
+        <div>
+          <ButtonLink look="quiet" className="-ms-2" to={takePath(sign)}>
+            {t('none.use')}
+          </ButtonLink>
+        </div>
       )}
     </li>
   );

@@ -5,6 +5,7 @@ import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR } from '#shared/contracts/calen
 import { FIRST_YEAR, PHENOMENA, type Phenomenon } from '#shared/sky/vocabulary.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { markerName } from '#src/lib/marker-names.js';
+import { useProblemWords } from '#src/lib/problem-words.js';
 import { readYear } from '#src/lib/civil-year.js';
 import { ComboField } from '#src/ui/combo-field.js';
 import { SelectField, TickField } from '#src/ui/field.js';
@@ -12,6 +13,7 @@ import { MonthDaySelect } from '#src/ui/month-day-select.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Stepper } from '#src/ui/stepper.js';
 import { Board } from '#src/ui/surfaces.js';
+import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { markerNamesQuery } from '../api/finder-queries.js';
 import type { Question } from '../model/finder-question.js';
 
@@ -28,8 +30,10 @@ const FIRST_STRETCH_DAYS = 10;
 
 /** The one question: a day or some days, or an old sign and since when. The answer follows while it is asked. */
 export function QuestionBoard(props: QuestionBoardProps) {
-  const { question, onChange } = props;
+  const { question, placeId, onChange } = props;
   const { t } = useTranslation('finder');
+  // Asked for at once: whoever turns to an old sign types its name in the next moment.
+  useQuery(markerNamesQuery(placeId));
   return (
     <Board className="grid gap-4" aria-label={t('ask.label')}>
       <PickGroup
@@ -107,7 +111,8 @@ function DayFields({ question, onChange }: QuestionBoardProps) {
 function OldFields({ question, placeId, onChange }: QuestionBoardProps) {
   const { t } = useTranslation(['finder', 'sky']);
   const words = useDateWords();
-  const { data } = useQuery(markerNamesQuery(placeId));
+  const problems = useProblemWords();
+  const { data, error, refetch } = useQuery(markerNamesQuery(placeId));
   const options = useMemo(
     () =>
       (data ?? []).map((names) => {
@@ -119,17 +124,28 @@ function OldFields({ question, placeId, onChange }: QuestionBoardProps) {
   );
   return (
     <div className="grid gap-3">
-      {/* The field takes its options once, so it waits for them. */}
-      <ComboField
-        key={options.length === 0 ? 'waiting' : 'ready'}
-        label={t('ask.oldMarker')}
-        hint={t('ask.oldMarkerHint')}
-        options={options}
-        value={question.oldMarker}
-        onChange={(oldMarker) => {
-          onChange({ oldMarker });
-        }}
-      />
+      {/* The field takes its options once, so it waits for them; nothing can be typed before and lost. */}
+      {data !== undefined ? (
+        <ComboField
+          label={t('ask.oldMarker')}
+          hint={t('ask.oldMarkerHint')}
+          options={options}
+          value={question.oldMarker}
+          onChange={(oldMarker) => {
+            onChange({ oldMarker });
+          }}
+        />
+      ) : error === null ? (
+        <Skeleton lines={2} />
+      ) : (
+        <TroubleNote
+          title={t('ask.namesTrouble')}
+          sentence={problems.problem(error)}
+          onRetry={() => {
+            void refetch();
+          }}
+        />
+      )}
       <SelectField
         label={t('ask.its')}
         value={question.oldPhenomenon}

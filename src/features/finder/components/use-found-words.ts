@@ -21,7 +21,7 @@ export interface FoundWords {
   range: (days: OccurrenceDays) => string;
   near: (found: FoundMarker) => string;
   /** The same where no heading says what it is near to: `1 day after your day`. */
-  nearInFull: (found: FoundMarker) => string;
+  nearInFull: (found: Pick<FoundMarker, 'daysAway'>) => string;
   exact: (found: FoundMarker) => string;
   ease: (found: FoundMarker) => string;
   keeps: (found: FoundMarker) => string;

@@ -5,6 +5,7 @@ import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
 import { answerWith, refusal, type Answers, type Sent } from '#tests/support/answers.js';
 import { CALENDAR, entryOf, tazimelMarkers, YEAR } from '#tests/support/draft-of-tazimel.js';
+import { skySign } from '#tests/support/finder-of-tazimel.js';
 import { OFFICER, renderOnBoard } from '#tests/support/on-board.js';
 import { starTable, TAZIMEL } from '#tests/support/stars-of-tazimel.js';
 
@@ -267,6 +268,18 @@ describe('a sign that was looked up for an entry', () => {
     expect(log.find(({ method }) => method === 'POST')?.body).toMatchObject({
       lead: { type: 'marker', markerKey: 'hr2491', phenomenon: 'heliacal-rising', occurrence: 2 },
     });
+  });
+
+  it('may be a sign of the Sun: the new entry begins with it and shows its days before anything is typed', async () => {
+    answerWith({
+      ...server(draft()),
+      [`POST /api/places/${TAZIMEL.id}/sky-markers`]: ({ body }: Sent) => skySign(body),
+    });
+    const sky = JSON.stringify({ kind: 'sun-season', season: 'june-solstice' });
+    await open(`?entry=new-x&sky=${encodeURIComponent(sky)}`);
+    await screen.findByLabelText(/Name of the work or rite/);
+    expect(chosen()).toContain('June solstice');
+    expect((await screen.findAllByText(/About 21.June, between 16 and 26.June/)).length).toBeGreaterThan(0);
   });
 
   it('can be looked for from the entry’s day, and the way leads back to this entry', async () => {

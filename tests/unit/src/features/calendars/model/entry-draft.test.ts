@@ -33,7 +33,7 @@ describe('an entry while it is being written', () => {
 
   it('begins with the star that was chosen on its page', () => {
     const { lead } = contentOf(
-      newDraft({ markerKey: 'hr2491', phenomenon: 'heliacal-setting', occurrence: 1 }),
+      newDraft({ type: 'marker', markerKey: 'hr2491', phenomenon: 'heliacal-setting', occurrence: 1 }),
     );
     expect(lead).toEqual({
       type: 'marker',

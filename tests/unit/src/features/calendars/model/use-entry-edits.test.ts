@@ -37,7 +37,12 @@ describe('writing over a saved entry', () => {
 
 describe('a new entry', () => {
   it('is kept from the first change on and has no state that it is written over', () => {
-    const start = newDraft({ markerKey: 'hr2491', phenomenon: 'heliacal-rising', occurrence: 1 });
+    const start = newDraft({
+      type: 'marker',
+      markerKey: 'hr2491',
+      phenomenon: 'heliacal-rising',
+      occurrence: 1,
+    });
     expect(changedEdit(undefined, start, {}, now)).toBeNull();
     expect(changedEdit(undefined, start, { titleOfficer: 'Weed' }, now)).toMatchObject({
       base: null,

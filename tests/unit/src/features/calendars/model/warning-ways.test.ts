@@ -15,7 +15,12 @@ describe('ways out of a warning', () => {
   });
 
   it('offer other days of the same star only where they come this year', () => {
-    const draft = newDraft({ markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 });
+    const draft = newDraft({
+      type: 'marker',
+      markerKey: 'pleiades',
+      phenomenon: 'heliacal-rising',
+      occurrence: 1,
+    });
     const dated = waysOut('no-date-this-year', draft, markers.get('pleiades') ?? null);
     expect(dated).toContainEqual({ kind: 'otherDay', phenomenon: 'acronychal-rising' });
     expect(dated).not.toContainEqual({ kind: 'otherDay', phenomenon: 'heliacal-rising' });

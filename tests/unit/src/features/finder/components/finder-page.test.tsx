@@ -3,7 +3,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { Place } from '#shared/contracts/places.js';
 import { FinderPage } from '#src/features/finder/components/finder-page.js';
 import { answerWith, type Sent } from '#tests/support/answers.js';
-import { found, markerNames, years } from '#tests/support/finder-of-tazimel.js';
+import { found, markerNames, skySigns, years } from '#tests/support/finder-of-tazimel.js';
 import { OFFICER, renderOnBoard } from '#tests/support/on-board.js';
 import { TAZIMEL } from '#tests/support/stars-of-tazimel.js';
 
@@ -29,6 +29,8 @@ async function open(query: string, { session = OFFICER, place = TAZIMEL } = {}) 
     [`GET /api/communities/${TAZIMEL.communityId}/places`]: { items: [place], nextCursor: null },
     [`GET /api/places/${TAZIMEL.id}/finder`]: (_: Sent, search: URLSearchParams) => found(search, place),
     [`GET /api/places/${TAZIMEL.id}/finder/names`]: () => markerNames(),
+    [`GET /api/places/${TAZIMEL.id}/sky-markers`]: (_: Sent, search: URLSearchParams) =>
+      skySigns(search, place),
     [`POST /api/places/${TAZIMEL.id}/finder/years`]: ({ body }: Sent) => years(body, place),
   });
   const view = await renderOnBoard(<FinderPage />, { session, path: `/finder?${query}`, pattern: '/finder' });
@@ -124,8 +126,29 @@ describe('where no star serves', () => {
     expect(board).toMatch(/the nights stay light: the Sun sinks only 1° below the horizon/);
     expect(board).toMatch(/\d+ never set here, \d+ never come up/);
     expect(board).toMatch(/The next sign after: .*, \d+ days after your day/);
-    expect(board).toMatch(/The Sun itself: where it comes up/);
     expect(board).toMatch(/Signs of the land: birds/);
+  });
+
+  it('offers the Sun’s own days near the wanted one, with a way into a calendar that carries the sign', async () => {
+    await open('year=2027&from=06-20', { place: FAR_NORTH });
+    const link = await screen.findByRole('link', { name: /Tie work to this sign: .*solstice/iu });
+    const address = new URL(link.getAttribute('href') ?? '', 'http://board.example');
+    expect(address.pathname).toBe('/calendars');
+    expect(JSON.parse(address.searchParams.get('sky') ?? '')).toEqual({
+      kind: 'sun-season',
+      season: 'june-solstice',
+    });
+    expect(plain(link.closest('li'))).toMatch(/About 21 June, between 16 and 26 June1 day after your day/);
+  });
+
+  it('keeps such signs closed, and unasked for, where stars serve', async () => {
+    const { user, sent } = await open('year=2027&from=06-10');
+    await cards();
+    expect(sent.some(({ path }) => path.endsWith('/sky-markers'))).toBe(false);
+    await user.click(screen.getByText('Sun, nights and stars at an hour'));
+    expect((await screen.findAllByRole('link', { name: /^Tie work to this sign/ })).length).toBeGreaterThan(
+      2,
+    );
   });
 });
 
