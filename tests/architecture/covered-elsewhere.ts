@@ -25,5 +25,4 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/sky/sky-markers/kind.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
   'shared/sky/sky-markers/sky-hour.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
   'shared/sky/sky-markers/spec-checks.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
-  'shared/sky/sky-markers/star-look.ts': 'tests/unit/shared/sky/sky-markers/sky-marker-year.test.ts',
 };

@@ -1,13 +1,6 @@
 import { describe, expect, it } from 'vitest';
 
-import {
-  computeSkyMarker,
-  dayNumberOf,
-  type Figure,
-  type Site,
-  SkyRangeError,
-  type SkyMarkerSpec,
-} from '#shared/sky/index.js';
+import { computeSkyMarker, type Figure, SkyRangeError, type SkyMarkerSpec } from '#shared/sky/index.js';
 import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
 
 const settings = settingsWith();
@@ -85,21 +78,5 @@ describe('a community’s own figure as a sign of the sky', () => {
   it('is unknown where it is not handed over', () => {
     for (const spec of signsOf(BOWL.key))
       expect(() => computeSkyMarker(spec, siteAt(12), settings, 2027)).toThrow(SkyRangeError);
-  });
-});
-
-describe('the first night with the Milky Way overhead', () => {
-  /** 66° N, 23° E: 15° are reached two weeks before 18°. */
-  const north: Site = siteAt(66, 23, { timeZone: 'Europe/Stockholm' });
-  const firstNight = (depthDeg: 15 | 18): number =>
-    computeSkyMarker({ kind: 'dark-night', end: 'first', depthDeg }, north, settings, 2027).occurrences[0]
-      ?.expected.dayNumber ?? Number.NaN;
-
-  it('comes about the end of August at the arctic circle, before the first night without any twilight', () => {
-    const september = dayNumberOf({ year: 2027, month: 9, day: 1 }, 'gregorian');
-    // At midnight the Sun stands 90° − 66° − declination deep: 15° deep where its declination is 9°, on 29 August.
-    expect(firstNight(15)).toBeGreaterThan(september - 6);
-    expect(firstNight(15)).toBeLessThan(september);
-    expect(firstNight(18)).toBeGreaterThan(september + 3);
   });
 });
