@@ -1,6 +1,6 @@
 import { publishedDates, publishedDifferenceDays } from '#tests/support/sky/published-dates.js';
 import { independentScanDays, ownScanDays } from './dates-by-scan.js';
-import { modelAgainstRuleDays } from './model-and-rule.js';
+import { modelAgainstRuleDays, setModelAgainstRuleDays } from './model-and-rule.js';
 import { ephemSunDays, erfaStarDays } from './places-in-the-sky.js';
 import { type Accuracy, accuracyOf } from './statistics.js';
 
@@ -16,5 +16,6 @@ export function accuracyReport(): Accuracy[] {
     accuracyOf('plain scan of the tests', ownScanDays()),
     accuracyOf('model of visibility, same side', model.sameSide),
     accuracyOf('model of visibility, opposite side', model.oppositeSide),
+    accuracyOf('model set by first mornings', setModelAgainstRuleDays()),
   ];
 }
