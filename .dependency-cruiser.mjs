@@ -20,7 +20,7 @@ const skyLayers = [
 ];
 
 /** The server's lower folders in the same order. */
-const serverLayers = ['config', 'db', 'storage', 'media', 'mail', 'print', 'http'];
+const serverLayers = ['config', 'db', 'policy', 'storage', 'media', 'mail', 'print', 'http'];
 
 /** @param {string[]} layers @param {string} below @param {string} name */
 function bottomToTop(layers, below, name) {
@@ -129,7 +129,7 @@ export default {
       name: 'server-base-below-features',
       comment: 'What every feature stands on may not know a feature.',
       severity: 'error',
-      from: { path: '^server/(config|db|storage|media|mail|print|http)/' },
+      from: { path: '^server/(config|db|policy|storage|media|mail|print|http)/' },
       to: { path: '^server/(features/|workers/|app\\.ts$|main\\.ts$)' },
     },
     ...bottomToTop(serverLayers, 'server', 'server-upward'),

@@ -50,6 +50,9 @@ import { DevicesService } from './features/session/devices.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
+import { GroupsService } from './features/sharing/groups.service.js';
+import { ItemSharingService } from './features/sharing/item-sharing.service.js';
+import { sharingRoutes } from './features/sharing/sharing.routes.js';
 import { sheetsRoutes } from './features/sheets/sheets.routes.js';
 import { SheetsService } from './features/sheets/sheets.service.js';
 import { SkyMarkerYearsService } from './features/sky-markers/sky-marker-years.service.js';
@@ -172,7 +175,7 @@ export function createApp(options: AppOptions): App {
 
   const sky = new SkyDatesService(skyYears, skyMarkerYears);
   const contents = new FrozenContentService(dataSource, clock, sky);
-  const versions = new VersionsService(dataSource);
+  const versions = new VersionsService(dataSource, clock);
   const publishing = new PublishingService(dataSource, clock, contents, versions);
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
@@ -197,7 +200,8 @@ export function createApp(options: AppOptions): App {
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
-  auditRoutes(mount, new AuditListService(dataSource));
+  sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
+  auditRoutes(mount, new AuditListService(dataSource, clock));
 
   app.use(router);
   app.use('/api', nothingHere);

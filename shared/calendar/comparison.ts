@@ -61,7 +61,7 @@ export function compareEntries<T extends ComparedBody>(
 }
 
 /** Differs between any two submissions and says nothing about the calendar. */
-const IDENTITY = new Set(['schema', 'calendarId', 'number', 'submittedAt']);
+const IDENTITY = new Set(['salt', 'schema', 'calendarId', 'number', 'submittedAt']);
 /** Follow from the place and from what the entries go by; the entries' own dates tell it better. */
 const DERIVED = new Set(['markers']);
 

@@ -6,11 +6,15 @@ import { canonicalJson } from '#shared/kernel/canonical-json.js';
  *
  * - entry hash   = SHA-256( salt ⏎ canonical JSON of {entryId, content, dates} )
  * - header hash  = SHA-256( canonical JSON of the header )
- * - version hash = SHA-256( "dawnpeg-version-1" ⏎ header hash ⏎ entry hashes in order, each with ⏎ )
+ * - leaf         = SHA-256( rank in decimal ⏎ entry hash )
+ * - version hash = SHA-256( "dawnpeg-version-2" ⏎ header hash ⏎ leaves in the order of their digits, each with ⏎ )
+ *   of scheme 1  = SHA-256( "dawnpeg-version-1" ⏎ header hash ⏎ entry hashes in order, each with ⏎ )
  *
- * The salt keeps the words of an entry that had to vanish from being guessed from the hash that stays.
+ * The salt keeps the words of an entry that had to vanish from being guessed from the hash that stays. Ranks grow in
+ * random steps and random leaves stand among the true ones: whoever is shown a part of the entries checks that part
+ * and its order, and cannot tell how many others there are.
  */
-const VERSION_HASH_SCHEME = 'dawnpeg-version-1';
+export type HashScheme = 1 | 2;
 
 export interface EntryBody {
   entryId: string;
@@ -27,6 +31,12 @@ export function entryHashText(salt: string, bodyText: string): string {
   return `${salt}\n${bodyText}`;
 }
 
-export function versionHashText(headerHash: string, entryHashes: readonly string[]): string {
-  return [VERSION_HASH_SCHEME, headerHash, ...entryHashes].map((line) => `${line}\n`).join('');
+export function leafText(rank: number, entryHash: string): string {
+  return `${rank}\n${entryHash}`;
+}
+
+/** @param leaves of scheme 1 the entry hashes in order, of scheme 2 the leaves in any order */
+export function versionHashText(scheme: HashScheme, headerHash: string, leaves: readonly string[]): string {
+  const lines = scheme === 1 ? leaves : [...leaves].sort();
+  return [`dawnpeg-version-${scheme}`, headerHash, ...lines].map((line) => `${line}\n`).join('');
 }

@@ -105,6 +105,27 @@ export function entryGaps({
   ];
 }
 
+/** Whose word a kept entry waits for: it is answered by its own people, apart from the village's sign-off. */
+export interface KeptEntry extends ReviewedEntry {
+  /** Who wrote it last: somebody else of its people agrees. */
+  writerId: string;
+  /** Giver and successor, where at some time of the year nobody else may see it: either's own word is enough then. */
+  ownPeople: ReadonlySet<string>;
+}
+
+/** Does a kept entry belong to a published version? Its people agreed to it, and none of them objects. */
+export function keptEntryStands(entry: KeptEntry, answers: readonly AnswerFact[]): boolean {
+  const given = answersByEntry([entry], answers).get(entry.entryId) ?? [];
+  const agreed = given.some(
+    ({ answer, elderId }) =>
+      answer === 'agree' && (elderId !== entry.writerId || entry.ownPeople.has(elderId)),
+  );
+  const opposed = given.some(
+    ({ answer, letStand }) => answer === 'not-for-the-board' || (answer === 'change-this' && !letStand),
+  );
+  return agreed && !opposed;
+}
+
 /** How many entries of the submission an elder has answered, by themselves or through somebody who wrote it down. */
 export function answeredCount(
   elderId: string,

@@ -24,6 +24,14 @@ export const AUDIT_ACTIONS = [
   'attachment-opened',
   'attachment-words-written',
   'attachment-removed',
+  'group-founded',
+  'group-changed',
+  'sharing-tightened',
+  'wider-asked',
+  'wider-agreed',
+  'wider-dropped',
+  'sharing-widened',
+  'kept-read',
   'calendar-begun',
   'entry-added',
   'entry-changed',
@@ -52,6 +60,8 @@ export const auditEvent = z.strictObject({
   action: z.enum(AUDIT_ACTIONS),
   /** Names looked up now from the ids that the row keeps; null where the thing is gone. */
   subjectName: z.string().nullable(),
+  /** True where its people keep it and this person does not read its name. */
+  isKept: z.boolean(),
   /** Codes and numbers only, e.g. `{ "number": 2, "fields": ["offsets"] }`. */
   details: z.record(z.string(), z.unknown()),
 });

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { id, instant, isoDate, line, listOf, monthDay, rowVersion, text } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
 import { ROLES } from './people.js';
+import { groupFitsLevel, PLAIN_DETAILS, sharingDetails, sharingLevel } from './sharing.js';
 import { skyMarkerSpec } from './sky-markers.js';
 import { markerKey, occurrenceDays, phenomenon } from './stars.js';
 import {
@@ -58,11 +59,6 @@ export const ENTRY_ICONS = [
 ] as const;
 export const entryIcon = z.enum(ENTRY_ICONS);
 export type EntryIcon = (typeof ENTRY_ICONS)[number];
-
-/** Group, Elders and Sealed come with the sharing levels. */
-export const SHARING_LEVELS = ['open', 'village'] as const;
-export const sharingLevel = z.enum(SHARING_LEVELS);
-export type SharingLevel = (typeof SHARING_LEVELS)[number];
 
 /** Which of the year's occurrences, where there are two. */
 export const occurrence = z.union([z.literal(1), z.literal(2)]);
@@ -130,8 +126,12 @@ const entryFields = z.strictObject({
   otherSigns: text(500),
   ifLate: text(500),
   giver: line(120),
+  /** The giver, where they are one of the village's people here: then it is theirs to tighten and to take back. */
+  giverId: id.nullable().optional(),
   agreedToPrint: z.boolean(),
   sharingLevel,
+  /** Beside the level; left out where there is nothing to say, so that older texts and hashes stay as they are. */
+  sharing: sharingDetails.optional(),
 });
 
 /** What an officer writes; everything that elders answer to. */
@@ -145,6 +145,10 @@ export const entryInput = entryFields.superRefine((entry, context) => {
   if (entry.hasLastDate && entry.protectiveWatch) {
     context.addIssue({ code: 'custom', path: ['protectiveWatch'], message: 'watch-or-last-date' });
   }
+  const { groupId } = entry.sharing ?? PLAIN_DETAILS;
+  groupFitsLevel({ level: entry.sharingLevel, groupId }, (message) => {
+    context.addIssue({ code: 'custom', path: ['sharing', 'groupId'], message });
+  });
 });
 export type EntryInput = z.infer<typeof entryInput>;
 
@@ -202,8 +206,14 @@ export const entry = z.strictObject({
   dates: entryDates,
   updatedBy: z.string(),
   updatedAt: instant,
+  /** The asking person's own, to write on: of a kept thing its giver's, else the officers'. */
+  mine: z.boolean(),
 });
 export type Entry = z.infer<typeof entry>;
+
+/** Entries that their people keep to themselves stand in the count, where their givers chose an empty slot. */
+export const entryList = listOf(entry).extend({ keptCount: z.number().int().min(0) });
+export type EntryList = z.infer<typeof entryList>;
 
 export const calendarInput = z.strictObject({
   placeId: id,
@@ -270,17 +280,17 @@ export const calendarsEndpoints = {
     id: 'listEntries',
     method: 'GET',
     path: '/api/calendars/:calendarId/entries',
-    summary: 'Entries of the draft with their dates',
+    summary: 'Entries of the draft with their dates, as far as the person may see them',
     access: member('calendar', ...draftReaders),
     params: calendarParams,
-    response: listOf(entry),
+    response: entryList,
   }),
   addEntry: defineEndpoint({
     id: 'addEntry',
     method: 'POST',
     path: '/api/calendars/:calendarId/entries',
     summary: 'Add an entry to the draft',
-    access: member('calendar', 'officer'),
+    access: member('calendar', 'officer', 'elder'),
     params: calendarParams,
     body: entryInput,
     response: entry,
@@ -291,7 +301,7 @@ export const calendarsEndpoints = {
     method: 'PUT',
     path: '/api/calendars/:calendarId/entries/:entryId',
     summary: 'Save an entry; 409 with both states when somebody saved a newer one',
-    access: member('calendar', 'officer'),
+    access: member('calendar', 'officer', 'elder'),
     params: entryParams,
     body: entryUpdate,
     response: entry,
@@ -301,7 +311,7 @@ export const calendarsEndpoints = {
     method: 'POST',
     path: '/api/calendars/:calendarId/entries/:entryId/copy',
     summary: 'Put a copy behind the entry',
-    access: member('calendar', 'officer'),
+    access: member('calendar', 'officer', 'elder'),
     params: entryParams,
     response: entry,
     status: 201,
@@ -311,7 +321,7 @@ export const calendarsEndpoints = {
     method: 'DELETE',
     path: '/api/calendars/:calendarId/entries/:entryId',
     summary: 'Take an entry out of the draft; it can be put back',
-    access: member('calendar', 'officer'),
+    access: member('calendar', 'officer', 'elder'),
     params: entryParams,
   }),
   restoreEntry: defineEndpoint({
@@ -319,7 +329,7 @@ export const calendarsEndpoints = {
     method: 'POST',
     path: '/api/calendars/:calendarId/entries/:entryId/restore',
     summary: 'Put an entry back that was taken out',
-    access: member('calendar', 'officer'),
+    access: member('calendar', 'officer', 'elder'),
     params: entryParams,
     response: entry,
   }),
@@ -327,10 +337,10 @@ export const calendarsEndpoints = {
     id: 'reorderEntries',
     method: 'PUT',
     path: '/api/calendars/:calendarId/order',
-    summary: 'Set the order of the entries; the list must name each entry once',
+    summary: 'Set the order of the entries; the list must name each entry that the person sees once',
     access: member('calendar', 'officer'),
     params: calendarParams,
     body: z.strictObject({ entryIds: z.array(id).max(ENTRIES_MAX) }),
-    response: listOf(entry),
+    response: entryList,
   }),
 } as const;

@@ -3,6 +3,7 @@ import { PATCH_CLASSES } from '../sky/vocabulary.js';
 import { id, instant, line, listOf, rowVersion, text } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
 import { languageTag, ROLES } from './people.js';
+import { groupFitsLevel, PLAIN_DETAILS, SHARING_LEVELS, sharingDetails, sharingLevel } from './sharing.js';
 import { markerKey } from './stars.js';
 
 export const FIGURE_NAME_MAX = 80;
@@ -15,10 +16,6 @@ export const FIGURES_MAX = 100;
 /** Needed depths of the Sun: no published value for the naked eye lies outside. */
 export const FIGURE_DEPTH_MIN_DEG = 4;
 export const FIGURE_DEPTH_MAX_DEG = 25;
-
-/** Who may read a figure: anybody the village's open pages reach, or the village. */
-export const FIGURE_LEVELS = ['open', 'village'] as const;
-export type FigureLevel = (typeof FIGURE_LEVELS)[number];
 
 const figureName = z.strictObject({ tag: languageTag, name: line(FIGURE_NAME_MAX, 1) });
 export type FigureName = z.infer<typeof figureName>;
@@ -65,7 +62,11 @@ const figureFields = z.strictObject({
   patch: patchInput.nullable(),
   /** Depths of the village's own instead of those of brightness or class. */
   ownDepths: z.strictObject({ sameSideDeg: depthDeg, oppositeSideDeg: depthDeg }).nullable(),
-  sharingLevel: z.enum(FIGURE_LEVELS),
+  sharingLevel,
+  /** Beside the level, for figure and story alike. */
+  sharing: sharingDetails.optional(),
+  /** Of story and variants: never wider than the figure; left out where it is the figure's. */
+  storyLevel: sharingLevel.optional(),
 });
 
 type FigureFields = z.infer<typeof figureFields>;
@@ -84,10 +85,32 @@ function leadIsClear(
   else if (indicatorHr === null || !memberHrs.includes(indicatorHr)) refuse('indicatorHr', 'leading-star');
 }
 
-export const figureInput = figureFields.superRefine(leadIsClear);
+/** A group level names its group; a story is as narrow as its figure, or narrower. */
+function levelsFit(
+  {
+    sharingLevel: level,
+    sharing,
+    storyLevel = level,
+  }: Pick<FigureFields, 'sharingLevel' | 'sharing' | 'storyLevel'>,
+  context: z.RefinementCtx,
+): void {
+  const { groupId } = sharing ?? PLAIN_DETAILS;
+  const hasGroup = level === 'group' || storyLevel === 'group';
+  groupFitsLevel({ level: hasGroup ? 'group' : level, groupId }, (message) => {
+    context.addIssue({ code: 'custom', path: ['sharing', 'groupId'], message });
+  });
+  if (SHARING_LEVELS.indexOf(storyLevel) < SHARING_LEVELS.indexOf(level)) {
+    context.addIssue({ code: 'custom', path: ['storyLevel'], message: 'story-wider-than-figure' });
+  }
+}
+
+export const figureInput = figureFields.superRefine(leadIsClear).superRefine(levelsFit);
 export type FigureInput = z.infer<typeof figureInput>;
 
-export const figureUpdate = figureFields.extend({ version: rowVersion }).superRefine(leadIsClear);
+export const figureUpdate = figureFields
+  .extend({ version: rowVersion })
+  .superRefine(leadIsClear)
+  .superRefine(levelsFit);
 export type FigureUpdate = z.infer<typeof figureUpdate>;
 
 /** An entry of a draft that goes by a figure. Drafts are for officers, elders and stewards. */
@@ -108,6 +131,8 @@ export const figure = figureFields.extend({
   updatedBy: z.string(),
   updatedAt: instant,
   version: rowVersion,
+  /** False where story and variants are kept by their people; they are empty then. */
+  storyShown: z.boolean(),
 });
 export type Figure = z.infer<typeof figure>;
 

@@ -14,6 +14,7 @@ import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
 import { reviewsEndpoints } from './reviews.js';
 import { sessionEndpoints } from './session.js';
+import { sharingEndpoints } from './sharing.js';
 import { sheetsEndpoints } from './sheets.js';
 import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
@@ -39,6 +40,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   reviewsEndpoints,
   attachmentsEndpoints,
   sheetsEndpoints,
+  sharingEndpoints,
   auditEndpoints,
   todayEndpoints,
   lookEndpoints,

@@ -39,6 +39,8 @@ export const versionHeader = z.strictObject({
   agricultureContact: z.string(),
   place: placeSnapshot,
   markers: z.array(frozenMarker),
+  /** Keeps what a header hides from somebody from being guessed by its hash; only a whole header shows it. */
+  salt: z.string().optional(),
 });
 export type VersionHeader = z.infer<typeof versionHeader>;
 
@@ -50,6 +52,8 @@ export const versionEntry = versionEntryBody.extend({
   /** Hex; with the canonical JSON it gives `hash`. */
   salt: z.string(),
   hash: z.string(),
+  /** Its place in the order, with gaps of random width; null in versions of the first scheme. */
+  rank: z.number().int().nullable(),
 });
 export type VersionEntry = z.infer<typeof versionEntry>;
 
@@ -98,6 +102,14 @@ export type VersionSummary = z.infer<typeof versionSummary>;
 export const version = versionSummary.extend({
   header: versionHeader,
   headerHash: z.string(),
+  /** False where markers or figures are left out that only kept entries go by; its hash cannot be made again then. */
+  headerComplete: z.boolean(),
+  scheme: z.union([z.literal(1), z.literal(2)]),
+  /** What the version's hash goes over: of entries seen, kept and withdrawn, and of nothing at all, told apart by nobody. */
+  leaves: z.array(z.string()),
+  /** Entries that their people keep, where the giver chose an empty slot; and those that were withdrawn with a trace. */
+  keptCount: z.number().int(),
+  withdrawnCount: z.number().int(),
   entries: z.array(versionEntry),
   /** What the officer wrote when changes were asked or the version was recalled; empty otherwise. */
   stateNote: z.string(),

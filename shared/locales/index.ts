@@ -15,6 +15,7 @@ import { texts as print } from './en/print.js';
 import { texts as problems } from './en/problems.js';
 import { texts as reviews } from './en/reviews.js';
 import { texts as session } from './en/session.js';
+import { texts as sharing } from './en/sharing.js';
 import { texts as sheets } from './en/sheets.js';
 import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
@@ -41,6 +42,7 @@ export const en = {
   figures,
   calendars,
   reviews,
+  sharing,
   sheets,
   audit,
   print,

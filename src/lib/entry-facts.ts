@@ -2,6 +2,7 @@ import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import { useDateWords } from './date-words.js';
+import { useSharingWords } from './sharing-words.js';
 import { useEntryWords, type NamesByKey } from './entry-words.js';
 import { useMarkerDayWords } from './marker-day-words.js';
 
@@ -26,6 +27,7 @@ export interface EntryFacts {
 /** An entry to be read. Needs the texts `calendars` and `sky`. */
 export function useEntryFacts(): EntryFacts {
   const { t } = useTranslation('calendars');
+  const sharing = useSharingWords();
   const dateWords = useDateWords();
   const entryWords = useEntryWords();
   const markerDays = useMarkerDayWords();
@@ -68,7 +70,11 @@ export function useEntryFacts(): EntryFacts {
         late: told([{ key: 'late', label: t('form.ifLate'), value: content.ifLate }]),
         whose: told([
           { key: 'giver', label: t('form.giver'), value: content.giver },
-          { key: 'level', label: t('form.sharingLevel'), value: t(`level.${content.sharingLevel}`) },
+          {
+            key: 'level',
+            label: t('form.sharingLevel'),
+            value: sharing(content.sharingLevel, content.sharing),
+          },
           {
             key: 'print',
             label: t('form.printing'),
@@ -77,5 +83,5 @@ export function useEntryFacts(): EntryFacts {
         ]),
       }),
     };
-  }, [t, dateWords, entryWords, markerDays]);
+  }, [t, sharing, dateWords, entryWords, markerDays]);
 }

@@ -1,5 +1,9 @@
+import { randomUUID } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { VillageGroupEntity } from '#server/db/entities/village-group.entity.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { addGroup } from '#tests/support/sharing-api.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
 import { ENDPOINTS } from '#shared/contracts/index.js';
@@ -37,6 +41,7 @@ interface Village {
   figureId: string;
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
+  groupId: string;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
   publishedNumber: number;
@@ -142,6 +147,9 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     figureId: village.figureId,
     attachmentId: village.attachmentId,
     part: '1',
+    groupId: village.groupId,
+    itemType: 'entry',
+    itemId: village.entryId,
     markerKey: 'pleiades',
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
@@ -218,8 +226,12 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     }),
     computeSkyMarker: () => ({ year: 2027, spec: { kind: 'zenith-sun' } }),
     createCalendar: () => ({ placeId: village.place.id, year: 2031 }),
-    addEntry: () => entryInput(),
+    // An elder writes what is kept; the village's entries are the officer's.
+    addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
+    addGroup: () => ({ name: `Menders ${role ?? ''}`, memberIds: [village.elderId] }),
+    updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
+    changeSharing: () => ({ sharing: { level: 'village', ...PLAIN_DETAILS }, ...stale }),
     reorderEntries: () => ({ entryIds: [village.entryId] }),
     askChanges: () => ({ reason: 'taken-back', note: '' }),
     recallVersion: () => ({ note: 'A wrong date' }),
@@ -252,6 +264,7 @@ async function furnishOwn(): Promise<Village> {
     personId: added.person.id,
     figureId,
     attachmentId: (await addPicture(village.elder, figureId)).id,
+    groupId: (await addGroup(village.steward, 'Weavers', [village.elder])).id,
     elderId: village.elder.personId,
     publishedNumber: published.number,
     reviewedNumber: reviewed.number,
@@ -273,10 +286,18 @@ async function furnishOther(): Promise<Village> {
     personId: officer.personId,
     figureId,
     attachmentId: (await addPicture(officer, figureId)).id,
+    groupId: await firstGroup(home.community.id),
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,
   };
+}
+
+/** Groups are founded by stewards and elders, who cannot sign in there. */
+async function firstGroup(communityId: string): Promise<string> {
+  const id = randomUUID();
+  await api.dataSource.getRepository(VillageGroupEntity).insert({ id, communityId, name: 'Lamp-makers' });
+  return id;
 }
 
 async function homeOf(officer: Client): Promise<{ community: Community; place: Place }> {

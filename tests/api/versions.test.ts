@@ -87,15 +87,19 @@ describe('submitting', () => {
     );
   });
 
-  it('can be checked with any tool: salted entry hashes, header hash, and one hash over them in order', async () => {
+  it('can be checked with any tool: salted entry hashes, header hash, and one hash over leaves with their ranks', async () => {
     const version = await submit(officer, calendar.id);
     for (const { salt, hash, entryId, content, dates } of version.entries) {
       expect(salt).toMatch(/^[0-9a-f]{32}$/);
       expect(sha256(`${salt}\n${canonicalJson({ entryId, content, dates })}`)).toBe(hash);
     }
     expect(sha256(canonicalJson(version.header))).toBe(version.headerHash);
-    const lines = ['dawnpeg-version-1', version.headerHash, ...hashesOf(version)];
+    const lines = ['dawnpeg-version-2', version.headerHash, ...[...version.leaves].sort()];
     expect(sha256(`${lines.join('\n')}\n`)).toBe(version.hash);
+    for (const { rank, hash } of version.entries)
+      expect(version.leaves).toContain(sha256(`${rank}\n${hash}`));
+    const ranks = version.entries.map(({ rank }) => rank ?? 0);
+    expect(ranks).toEqual([...ranks].sort((a, b) => a - b));
     expect(new Set(version.entries.map(({ salt }) => salt)).size).toBe(2);
   });
 

@@ -3,6 +3,7 @@
  * more about them than a test of their own would.
  */
 export const coveredElsewhere: Readonly<Record<string, string>> = {
+  'shared/contracts/sharing.ts': 'tests/api/sharing.test.ts',
   'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sheet/day-row.ts': 'tests/unit/shared/sheet/month-card.test.ts',

@@ -46,6 +46,7 @@ export function entryOf(markers: Markers, id: number, changes: Partial<EntryInpu
     version: 1,
     content: own,
     dates: entryDatesFromDays(own, YEAR, row ? { ...row, year: YEAR } : null),
+    mine: true,
     updatedBy: 'Beyno',
     updatedAt: AT,
   };

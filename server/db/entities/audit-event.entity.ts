@@ -27,7 +27,17 @@ export class AuditEventEntity {
   action!: AuditAction;
 
   @Column({ name: 'subject_type', ...codeColumn(16) })
-  subjectType!: 'person' | 'community' | 'place' | 'calendar' | 'entry' | 'version' | 'figure' | 'attachment';
+  subjectType!:
+    | 'person'
+    | 'community'
+    | 'place'
+    | 'calendar'
+    | 'entry'
+    | 'version'
+    | 'figure'
+    | 'group'
+    | 'note'
+    | 'attachment';
 
   @Column({ name: 'subject_id', type: 'uuid', nullable: true })
   subjectId!: string | null;

@@ -51,6 +51,18 @@ export class CalendarVersionEntity {
   @Column({ ...sha256Column })
   hash!: string;
 
+  /** How `hash` is made: 1 over entry hashes in order, 2 over sorted leaves. */
+  @Column({ type: 'int', default: 1 })
+  scheme!: number;
+
+  /** What the hash goes over, kept when an entry is withdrawn; null in a version of scheme 1 that is still whole. */
+  @Column({ type: 'json', nullable: true })
+  leaves!: string[] | null;
+
+  /** Entries that were withdrawn and whose givers let that be said. */
+  @Column({ name: 'withdrawn_traces', type: 'int', default: 0 })
+  withdrawnTraces!: number;
+
   /** As it stood when the draft was submitted: who has to sign does not change in the middle of a review. */
   @Column({ name: 'sign_off_rule', type: 'json' })
   signOffRule!: SignOffRule;

@@ -1,4 +1,4 @@
-import type { FigureInput, FigureLevel, FigureName, FigureVariant } from '#shared/contracts/figures.js';
+import type { FigureInput, FigureName, FigureVariant } from '#shared/contracts/figures.js';
 import {
   Column,
   Entity,
@@ -9,7 +9,7 @@ import {
   VersionColumn,
   type Relation,
 } from 'typeorm';
-import { codeColumn, instantColumn } from './columns.js';
+import { instantColumn } from './columns.js';
 import { CommunityEntity } from './community.entity.js';
 
 /** A figure of a village: names, story, and what carries its dates. */
@@ -47,9 +47,6 @@ export class FigureEntity {
 
   @Column({ name: 'own_depths', type: 'json', nullable: true })
   ownDepths!: FigureInput['ownDepths'];
-
-  @Column({ name: 'sharing_level', ...codeColumn(16) })
-  sharingLevel!: FigureLevel;
 
   /** Set when an officer took it out; drafts that still go by it keep their dates, and it can be put back. */
   @Column({ name: 'taken_out_at', ...instantColumn, nullable: true })

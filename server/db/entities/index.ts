@@ -9,6 +9,9 @@ import { CommunityEntity } from './community.entity.js';
 import { DraftContributionEntity } from './draft-contribution.entity.js';
 import { EntryEntity } from './entry.entity.js';
 import { FigureEntity } from './figure.entity.js';
+import { GroupMemberEntity } from './group-member.entity.js';
+import { ItemSharingEntity } from './item-sharing.entity.js';
+import { KeptReadEntity } from './kept-read.entity.js';
 import { LetterChoiceEntity } from './letter-choice.entity.js';
 import { LetterEntity } from './letter.entity.js';
 import { MembershipEntity } from './membership.entity.js';
@@ -18,6 +21,7 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
+import { VillageGroupEntity } from './village-group.entity.js';
 
 /** Named one by one: a glob would miss a file quietly, and breaks in a build. */
 export const ENTITIES = [
@@ -41,4 +45,8 @@ export const ENTITIES = [
   AttachmentEntity,
   AttachmentPartEntity,
   AttachmentWordsEntity,
+  VillageGroupEntity,
+  GroupMemberEntity,
+  ItemSharingEntity,
+  KeptReadEntity,
 ];

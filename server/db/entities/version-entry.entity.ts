@@ -19,6 +19,14 @@ export class VersionEntryEntity {
   @Column({ type: 'int' })
   position!: number;
 
+  /** Place in the order as the hash covers it; null in versions of scheme 1. */
+  @Column({ type: 'int', nullable: true })
+  rank!: number | null;
+
+  /** False where its own people had not agreed to a kept entry when the version was published. */
+  @Column({ type: 'boolean', default: true })
+  stands!: boolean;
+
   @Index('version_entry_entry')
   @Column({ name: 'entry_id', type: 'uuid' })
   entryId!: string;

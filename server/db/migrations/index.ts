@@ -1,6 +1,7 @@
 import { FirstSchema1796000000000 } from './1796000000000-first-schema.js';
 import { Letters1796200000000 } from './1796200000000-letters.js';
 import { Figures1796400000000 } from './1796400000000-figures.js';
+import { Sharing1796600000000 } from './1796600000000-sharing.js';
 import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 import { Attachments1797200000000 } from './1797200000000-attachments.js';
 
@@ -9,6 +10,7 @@ export const MIGRATIONS = [
   FirstSchema1796000000000,
   Letters1796200000000,
   Figures1796400000000,
+  Sharing1796600000000,
   RainMonths1797000000000,
   Attachments1797200000000,
 ];

@@ -6,7 +6,7 @@ import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
-import { villageFigures } from '../figures/village-figures.service.js';
+import { everyVillageFigure } from '../figures/village-figures.service.js';
 
 type Look = (manager: EntityManager, actor: Actor, id: string) => Promise<boolean>;
 
@@ -32,7 +32,7 @@ const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
     seesDrafts(actor) &&
     (await manager.existsBy(AnswerEntity, { id, calendar: { communityId: actor.communityId } })),
   marker: async (manager, { communityId }, key) =>
-    resolveMarker(key, await villageFigures(manager, communityId)) !== null,
+    resolveMarker(key, await everyVillageFigure(manager, communityId)) !== null,
 };
 
 export async function maySeeSubject(

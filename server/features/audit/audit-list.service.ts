@@ -3,9 +3,11 @@ import type { PageQuery } from '#shared/contracts/common.js';
 import type { DataSource } from 'typeorm';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
+import type { Clock } from '../../http/context.js';
+import { viewerOf } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
 import { toAuditEvent } from './audit.mapper.js';
-import { auditPage, subjectNames } from './audit.repository.js';
+import { auditPage, subjectAppearances, subjectNames } from './audit.repository.js';
 
 const PAGE_LENGTH = 50;
 
@@ -15,7 +17,10 @@ export interface AuditPage {
 }
 
 export class AuditListService {
-  constructor(private readonly dataSource: DataSource) {}
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+  ) {}
 
   /** Names are looked up now: the rows hold ids and codes only. The cursor is the last row's place in the order. */
   async list(actor: Actor, { cursor, limit = PAGE_LENGTH }: PageQuery): Promise<AuditPage> {
@@ -27,7 +32,9 @@ export class AuditListService {
       isElder: hasRole(actor, 'elder'),
     };
     const rows = await auditPage(manager, reader, cursor ?? null, limit + 1);
-    const page = rows.slice(0, limit);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const appears = await subjectAppearances(manager, viewer, rows);
+    const page = rows.slice(0, limit).filter((row) => appears(row) !== 'none');
     const actors = await personNames(
       manager,
       page.map(({ actorId }) => actorId),
@@ -38,10 +45,11 @@ export class AuditListService {
         toAuditEvent(
           row,
           row.actorId === null ? '' : (actors.get(row.actorId) ?? ''),
-          row.subjectId === null ? null : (subjects.get(row.subjectId) ?? null),
+          row.subjectId === null || appears(row) !== 'full' ? null : (subjects.get(row.subjectId) ?? null),
+          appears(row) === 'blank',
         ),
       ),
-      nextCursor: rows.length > limit ? (page.at(-1)?.sequence ?? null) : null,
+      nextCursor: rows.length > limit ? (rows[limit - 1]?.sequence ?? null) : null,
     };
   }
 }

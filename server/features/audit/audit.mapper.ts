@@ -5,6 +5,7 @@ export function toAuditEvent(
   row: AuditEventEntity,
   actorName: string,
   subjectName: string | null,
+  isKept: boolean,
 ): AuditEvent {
   return {
     id: row.id,
@@ -12,6 +13,7 @@ export function toAuditEvent(
     actorName,
     action: row.action,
     subjectName,
+    isKept,
     details: row.details,
   };
 }

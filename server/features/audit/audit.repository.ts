@@ -6,6 +6,10 @@ import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
+import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
+import { appearance, type Appearance } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import type { Viewer } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
 
 type SubjectType = AuditEventEntity['subjectType'];
@@ -59,6 +63,10 @@ const NAMES: Readonly<
         content.titleOfficer,
       ]),
     ),
+  group: async (manager, ids) =>
+    new Map((await manager.findBy(VillageGroupEntity, { id: In(ids) })).map(({ id, name }) => [id, name])),
+  /** A note has no name of its own. */
+  note: () => Promise.resolve(new Map<string, string>()),
   calendar: async (manager, ids) =>
     new Map(
       (await manager.find(CalendarEntity, { where: { id: In(ids) }, relations: { place: true } })).map(
@@ -91,4 +99,25 @@ export async function subjectNames(
     for (const [id, name] of await NAMES[type](manager, [...new Set(ids)])) names.set(id, name);
   }
   return names;
+}
+
+/** Subjects that have a level of their own. */
+const LEVELLED = ['entry', 'figure', 'note'] as const;
+
+/** How each row's subject appears to a person: what leaves no trace for them leaves none in the records either. */
+export async function subjectAppearances(
+  manager: EntityManager,
+  viewer: Viewer,
+  rows: readonly AuditEventEntity[],
+): Promise<(row: AuditEventEntity) => Appearance> {
+  const found = new Map<string, Appearance>();
+  for (const type of LEVELLED) {
+    const ids = rows.flatMap((row) => (row.subjectType === type && row.subjectId ? [row.subjectId] : []));
+    const shared = await sharedById(manager, type, ids);
+    for (const id of ids) found.set(`${type} ${id}`, appearance(viewer, shared.get(id)));
+  }
+  return ({ subjectType, subjectId }) =>
+    LEVELLED.some((type) => type === subjectType)
+      ? (found.get(`${subjectType} ${subjectId}`) ?? 'none')
+      : 'full';
 }

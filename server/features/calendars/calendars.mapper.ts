@@ -9,12 +9,13 @@ export interface CalendarFacts {
   /** With community and place. */
   row: CalendarEntity;
   published: PublishedFacts | null;
-  draftEntryCount: number;
+  /** Of the draft or of what was published, as far as the person sees it. */
+  entryCount: number;
   /** Whoever does not see drafts learns nothing about one: not that it is out, how long it is, when it changed. */
   showsDraft: boolean;
 }
 
-export function toCalendar({ row, published, draftEntryCount, showsDraft }: CalendarFacts): Calendar {
+export function toCalendar({ row, published, entryCount, showsDraft }: CalendarFacts): Calendar {
   return {
     id: row.id,
     communityId: row.communityId,
@@ -25,21 +26,31 @@ export function toCalendar({ row, published, draftEntryCount, showsDraft }: Cale
     locked: showsDraft && row.outNumber !== null,
     outNumber: showsDraft ? row.outNumber : null,
     published: published && { number: published.number, label: published.label },
-    entryCount: showsDraft ? draftEntryCount : (published?.entryCount ?? 0),
+    entryCount,
     updatedAt: (showsDraft ? row.updatedAt : (published?.publishedAt ?? row.createdAt)).toISOString(),
   };
 }
 
-export function toEntry(row: EntryEntity, dates: EntryDates, updatedByName: string): Entry {
+export interface EntryFacts {
+  row: EntryEntity;
+  dates: EntryDates;
+  updatedByName: string;
+  /** Among those that the person sees, so that no gap shows what they do not see. */
+  position: number;
+  mine: boolean;
+}
+
+export function toEntry({ row, dates, updatedByName, position, mine }: EntryFacts): Entry {
   return {
     id: row.id,
     calendarId: row.calendarId,
-    position: row.position,
+    position,
     version: row.version,
     content: row.content,
     dates,
     updatedBy: updatedByName,
     updatedAt: row.updatedAt.toISOString(),
+    mine,
   };
 }
 

@@ -1,7 +1,10 @@
+import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import { In, IsNull, type EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import type { SeenThing } from '../../policy/entry-sight.js';
+import { markerKeyOfLead } from './sky-dates.service.js';
 
 /** Entries of the draft in their order, without those that were taken out. */
 export async function liveEntries(manager: EntityManager, calendarId: string): Promise<EntryEntity[]> {
@@ -24,25 +27,28 @@ export async function writeOrder(manager: EntityManager, entryIds: readonly stri
   ]);
 }
 
-export async function liveEntryCounts(
+/** The draft's entries of several calendars, as the policy asks about them. */
+export async function draftThings(
   manager: EntityManager,
   calendarIds: readonly string[],
-): Promise<Map<string, number>> {
-  const rows = await manager
-    .createQueryBuilder(EntryEntity, 'entry')
-    .select('entry.calendarId', 'calendarId')
-    .addSelect('COUNT(*)', 'count')
-    .where('entry.calendarId IN (:...calendarIds) AND entry.deletedAt IS NULL', { calendarIds })
-    .groupBy('entry.calendarId')
-    .getRawMany<{ calendarId: string; count: string }>();
-  return new Map(rows.map((row) => [row.calendarId, Number(row.count)]));
+): Promise<Map<string, SeenThing[]>> {
+  const rows = await manager.find(EntryEntity, {
+    where: { calendarId: In([...calendarIds]), deletedAt: IsNull() },
+    select: { id: true, calendarId: true, content: true },
+  });
+  return grouped(
+    rows.map(({ id, calendarId, content }) => [
+      calendarId,
+      { entryId: id, markerKey: markerKeyOfLead(content.lead) },
+    ]),
+  );
 }
 
 export interface PublishedFacts {
   number: number;
   label: string;
   publishedAt: Date | null;
-  entryCount: number;
+  things: readonly SeenThing[];
 }
 
 /** The version that is published now, by calendar. */
@@ -56,8 +62,25 @@ export async function publishedFacts(
   });
   const facts = new Map<string, PublishedFacts>();
   for (const { id, calendarId, number, label, publishedAt } of versions) {
-    const entryCount = await manager.countBy(VersionEntryEntity, { versionId: id });
-    facts.set(calendarId, { number, label: label ?? '', publishedAt, entryCount });
+    const rows = await manager.find(VersionEntryEntity, {
+      where: { versionId: id },
+      select: { id: true, entryId: true, bodyText: true },
+    });
+    const things = rows.map(({ entryId, bodyText }) => {
+      const { content } = JSON.parse(bodyText) as VersionEntryBody;
+      return { entryId, markerKey: markerKeyOfLead(content.lead) };
+    });
+    facts.set(calendarId, { number, label: label ?? '', publishedAt, things });
   }
   return facts;
+}
+
+function grouped(pairs: readonly (readonly [string, SeenThing])[]): Map<string, SeenThing[]> {
+  const groups = new Map<string, SeenThing[]>();
+  for (const [key, thing] of pairs) {
+    const known = groups.get(key);
+    if (known) known.push(thing);
+    else groups.set(key, [thing]);
+  }
+  return groups;
 }

@@ -10,8 +10,8 @@ export function calendarsRoutes(mount: Mount, calendars: CalendarsService, entri
   );
   mount.forMember(calendarsEndpoints.create, ({ body }, actor) => calendars.create(actor, body));
   mount.forMember(calendarsEndpoints.read, ({ params }, actor) => calendars.read(actor, params.calendarId));
-  mount.forMember(calendarsEndpoints.listEntries, async ({ params }) =>
-    wholeList(await entries.list(params.calendarId)),
+  mount.forMember(calendarsEndpoints.listEntries, ({ params }, actor) =>
+    entries.list(actor, params.calendarId),
   );
   mount.forMember(calendarsEndpoints.addEntry, ({ params, body }, actor) =>
     entries.add(actor, params.calendarId, body),
@@ -29,7 +29,7 @@ export function calendarsRoutes(mount: Mount, calendars: CalendarsService, entri
   mount.forMember(calendarsEndpoints.restoreEntry, ({ params }, actor) =>
     entries.restore(actor, params.calendarId, params.entryId),
   );
-  mount.forMember(calendarsEndpoints.reorderEntries, async ({ params, body }, actor) =>
-    wholeList(await entries.reorder(actor, params.calendarId, body.entryIds)),
+  mount.forMember(calendarsEndpoints.reorderEntries, ({ params, body }, actor) =>
+    entries.reorder(actor, params.calendarId, body.entryIds),
   );
 }

@@ -8,9 +8,11 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor, type Person } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { entrySight, type SeenThing } from '../../policy/entry-sight.js';
+import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { toCalendar } from './calendars.mapper.js';
-import { liveEntryCounts, publishedFacts } from './calendars.repository.js';
+import { draftThings, publishedFacts } from './calendars.repository.js';
 
 export class CalendarsService {
   constructor(
@@ -88,17 +90,25 @@ export class CalendarsService {
     if (rows.length === 0) return [];
     const ids = rows.map(({ id }) => id);
     const { manager } = this.dataSource;
-    const counts = await liveEntryCounts(manager, ids);
+    const drafts = await draftThings(manager, ids);
     const published = await publishedFacts(manager, ids);
-    return rows.map((row) => {
-      const actor = actors.get(row.communityId);
-      return toCalendar({
-        row,
-        published: published.get(row.id) ?? null,
-        draftEntryCount: counts.get(row.id) ?? 0,
-        showsDraft: actor !== undefined && seesDrafts(actor),
-      });
-    });
+    const counted = await Promise.all(
+      rows.map(async (row) => {
+        const actor = actors.get(row.communityId);
+        const facts = published.get(row.id) ?? null;
+        const showsDraft = actor !== undefined && seesDrafts(actor);
+        const things = showsDraft ? (drafts.get(row.id) ?? []) : (facts?.things ?? []);
+        const entryCount = actor === undefined ? 0 : await this.countSeen(actor, things);
+        return toCalendar({ row, published: facts, entryCount, showsDraft });
+      }),
+    );
+    return counted;
+  }
+
+  private async countSeen(actor: Actor, things: readonly SeenThing[]): Promise<number> {
+    const { manager } = this.dataSource;
+    const sight = await entrySight(manager, await viewerOf(manager, actor, this.clock.now()), things);
+    return things.filter((thing) => sight.appearance(thing) === 'full').length;
   }
 }
 

@@ -1,7 +1,13 @@
 import { inOrder } from '#shared/calendar/entry-dates.js';
 import { overlappingEntryIds } from '#shared/calendar/overlap.js';
 import type { AuditAction } from '#shared/contracts/audit.js';
-import { ENTRIES_MAX, type Entry, type EntryInput, type EntryUpdate } from '#shared/contracts/calendars.js';
+import {
+  ENTRIES_MAX,
+  type Entry,
+  type EntryInput,
+  type EntryList,
+  type EntryUpdate,
+} from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
@@ -11,12 +17,18 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
+import { isKept } from '../../policy/policy.js';
+import { copySharing, sharedById } from '../../policy/sharing.repository.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { villageFigures } from '../figures/village-figures.service.js';
+import { recordKeptReads } from '../audit/kept-reads.service.js';
+import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
 import { lockOpenDraft, readDraft, recordContribution } from './draft.service.js';
+import { expectMayWrite, mayWrite, shareChangedEntry, shareNewEntry } from './entry-sharing.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from './sky-dates.service.js';
 
 /** The draft's entries. Each change waits for the calendar's lock and is refused while a submission is out. */
@@ -27,58 +39,68 @@ export class EntriesService {
     private readonly sky: SkyDatesService,
   ) {}
 
-  async list(calendarId: string): Promise<Entry[]> {
+  async list(actor: Actor, calendarId: string): Promise<EntryList> {
     const { manager } = this.dataSource;
-    return this.describe(manager, await manager.findOneByOrFail(CalendarEntity, { id: calendarId }));
+    const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
+    const list = await this.describe(manager, actor, calendar);
+    const ids = list.items.map(({ id }) => id);
+    await recordKeptReads(manager, await this.viewer(manager, actor), this.clock.now(), 'entry', ids);
+    return list;
   }
 
   async add(actor: Actor, calendarId: string, content: EntryInput): Promise<Entry> {
     return this.change(calendarId, async (manager, calendar) => {
-      await expectKnownMarker(manager, calendar, content, 'lead');
+      await expectKnownMarker(manager, await this.viewer(manager, actor), content, 'lead');
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
+      await shareNewEntry(manager, actor, id, content);
       await writeOrder(manager, [...entries.map((entry) => entry.id), id]);
       await this.record(manager, actor, calendarId, 'entry-added', id);
-      return this.one(manager, calendar, id);
+      return this.one(manager, actor, calendar, id);
     });
   }
 
   /** Saving what is stored already changes nothing: no new version, and nobody becomes a writer by it. */
   async update(actor: Actor, calendarId: string, entryId: string, input: EntryUpdate): Promise<Entry> {
     return this.change(calendarId, async (manager, calendar) => {
-      const row = await liveEntry(manager, calendarId, entryId);
-      if (row.version !== input.version) throw stale(await this.one(manager, calendar, entryId), input);
+      const row = await this.writable(manager, actor, calendarId, entryId);
+      if (row.version !== input.version)
+        throw stale(await this.one(manager, actor, calendar, entryId), input);
       const fields = changedFields(row.content, input.content);
       if (fields.includes('lead')) {
-        await expectKnownMarker(manager, calendar, input.content, 'content.lead');
+        await expectKnownMarker(manager, await this.viewer(manager, actor), input.content, 'content.lead');
       }
       if (fields.length > 0) {
+        // Recorded first: who may see it afterwards is decided by what it says afterwards.
+        await this.record(manager, actor, calendarId, 'entry-changed', entryId, { fields });
+        await shareChangedEntry(manager, actor, entryId, input.content);
         await manager.update(
           EntryEntity,
           { id: entryId, version: input.version },
           { content: input.content, updatedBy: actor.person.id, updatedAt: this.clock.now() },
         );
-        await this.record(manager, actor, calendarId, 'entry-changed', entryId, { fields });
       }
-      return this.one(manager, calendar, entryId);
+      return this.one(manager, actor, calendar, entryId);
     });
   }
 
+  /** The copy is shared as the original is, and with the same giver. */
   async duplicate(actor: Actor, calendarId: string, entryId: string): Promise<Entry> {
     return this.change(calendarId, async (manager, calendar) => {
-      const original = await liveEntry(manager, calendarId, entryId);
+      const original = await this.writable(manager, actor, calendarId, entryId);
       const ids = (await liveEntries(manager, calendarId)).map((entry) => entry.id);
       const id = await this.insert(manager, actor, calendarId, original.content, ids.length);
+      await copySharing(manager, 'entry', entryId, id);
       await writeOrder(manager, insertAt(ids, ids.indexOf(entryId) + 1, id));
       await this.record(manager, actor, calendarId, 'entry-copied', id, { from: entryId });
-      return this.one(manager, calendar, id);
+      return this.one(manager, actor, calendar, id);
     });
   }
 
   /** The entry keeps its place in the order, so that putting it back puts it where it was. */
   async remove(actor: Actor, calendarId: string, entryId: string): Promise<void> {
     await this.change(calendarId, async (manager) => {
-      await liveEntry(manager, calendarId, entryId);
+      await this.writable(manager, actor, calendarId, entryId);
       const at = this.clock.now();
       await manager.update(EntryEntity, { id: entryId }, this.touched(actor, { deletedAt: at }));
       await writeOrder(
@@ -93,26 +115,36 @@ export class EntriesService {
     return this.change(calendarId, async (manager, calendar) => {
       const row = await manager.findOneBy(EntryEntity, { id: entryId, calendarId });
       if (row === null) throw notFound();
+      await this.expectWritable(manager, actor, entryId);
       if (row.deletedAt === null) throw conflict('nothing-to-restore');
       const ids = (await liveEntries(manager, calendarId)).map((entry) => entry.id);
       if (ids.length >= ENTRIES_MAX) throw conflict('too-many-entries');
       await manager.update(EntryEntity, { id: entryId }, this.touched(actor, { deletedAt: null }));
       await writeOrder(manager, insertAt(ids, row.position, entryId));
       await this.record(manager, actor, calendarId, 'entry-restored', entryId);
-      return this.one(manager, calendar, entryId);
+      return this.one(manager, actor, calendar, entryId);
     });
   }
 
-  async reorder(actor: Actor, calendarId: string, entryIds: readonly string[]): Promise<Entry[]> {
+  /** Of the entries that the person sees; all others stay where they stand between them. */
+  async reorder(actor: Actor, calendarId: string, entryIds: readonly string[]): Promise<EntryList> {
     return this.change(calendarId, async (manager, calendar) => {
-      const ids = (await liveEntries(manager, calendarId)).map((entry) => entry.id);
-      if (!sameJson([...ids].sort(), [...entryIds].sort())) throw conflict('order-differs');
-      if (!sameJson(ids, entryIds)) {
-        await writeOrder(manager, entryIds);
+      const rows = await liveEntries(manager, calendarId);
+      const sight = await this.sight(manager, actor, rows);
+      const ids = rows.map(({ id }) => id);
+      const seen = rows.filter((row) => sight.appearance(thingOf(row)) === 'full').map(({ id }) => id);
+      if (!sameJson([...seen].sort(), [...entryIds].sort())) throw conflict('order-differs');
+      if (!sameJson(seen, entryIds)) {
+        const movable = new Set(seen);
+        const next = [...entryIds];
+        await writeOrder(
+          manager,
+          ids.map((id) => (movable.has(id) ? (next.shift() ?? id) : id)),
+        );
         await recordContribution(manager, calendarId, actor.person.id, this.clock.now());
-        await this.audit(manager, actor, 'entries-reordered', 'calendar', calendarId, { count: ids.length });
+        await this.audit(manager, actor, 'entries-reordered', 'calendar', calendarId, { count: seen.length });
       }
-      return this.describe(manager, calendar);
+      return this.describe(manager, actor, calendar);
     });
   }
 
@@ -142,28 +174,82 @@ export class EntriesService {
     return { ...change, updatedBy: actor.person.id, updatedAt: this.clock.now() };
   }
 
-  private async one(manager: EntityManager, calendar: CalendarEntity, entryId: string): Promise<Entry> {
-    const entry = (await this.describe(manager, calendar)).find(({ id }) => id === entryId);
+  /** As its writer sees it, also where the level that they just gave it hides it from them. */
+  private async one(
+    manager: EntityManager,
+    actor: Actor,
+    calendar: CalendarEntity,
+    entryId: string,
+  ): Promise<Entry> {
+    const { items } = await this.describe(manager, actor, calendar, entryId);
+    const entry = items.find(({ id }) => id === entryId);
     if (!entry) throw notFound();
     return entry;
   }
 
-  /** The whole draft: whether two windows collide can only be said with all of them at hand. */
-  private async describe(manager: EntityManager, calendar: CalendarEntity): Promise<Entry[]> {
+  private viewer(manager: EntityManager, actor: Actor): Promise<Viewer> {
+    return viewerOf(manager, actor, this.clock.now());
+  }
+
+  private async sight(
+    manager: EntityManager,
+    actor: Actor,
+    rows: readonly EntryEntity[],
+  ): Promise<EntrySight> {
+    return entrySight(manager, await this.viewer(manager, actor), rows.map(thingOf));
+  }
+
+  /** The whole draft: whether two windows collide can only be said with all that are seen at hand. */
+  private async describe(
+    manager: EntityManager,
+    actor: Actor,
+    calendar: CalendarEntity,
+    writtenId?: string,
+  ): Promise<EntryList> {
     const { entries } = await readDraft(manager, this.sky, calendar);
+    const viewer = await this.viewer(manager, actor);
+    const sight = await entrySight(
+      manager,
+      viewer,
+      entries.map(({ row }) => thingOf(row)),
+    );
+    const seen = entries.filter(
+      ({ row }) => row.id === writtenId || sight.appearance(thingOf(row)) === 'full',
+    );
     const colliding = overlappingEntryIds(
-      entries.map(({ row, dates }) => ({ id: row.id, timing: row.content, window: dates.window })),
+      seen.map(({ row, dates }) => ({ id: row.id, timing: row.content, window: dates.window })),
     );
     const names = await personNames(
       manager,
-      entries.map(({ row }) => row.updatedBy),
+      seen.map(({ row }) => row.updatedBy),
     );
-    return entries.map(({ row, dates }) => {
+    const items = seen.map(({ row, dates }, position) => {
       const warnings = colliding.has(row.id)
         ? inOrder(new Set([...dates.warnings, 'windows-overlap' as const]))
         : dates.warnings;
-      return toEntry(row, { ...dates, warnings }, names.get(row.updatedBy) ?? '');
+      const updatedByName = names.get(row.updatedBy) ?? '';
+      const mine = mayWrite(viewer, sight.sharedOf(row.id));
+      return toEntry({ row, dates: { ...dates, warnings }, updatedByName, position, mine });
     });
+    const keptCount = entries.filter(({ row }) => sight.appearance(thingOf(row)) === 'blank').length;
+    return { items, nextCursor: null, keptCount };
+  }
+
+  /** An entry that is there for this person and theirs to write. */
+  private async writable(
+    manager: EntityManager,
+    actor: Actor,
+    calendarId: string,
+    entryId: string,
+  ): Promise<EntryEntity> {
+    const row = await liveEntry(manager, calendarId, entryId);
+    await this.expectWritable(manager, actor, entryId);
+    return row;
+  }
+
+  private async expectWritable(manager: EntityManager, actor: Actor, entryId: string): Promise<void> {
+    const viewer = await this.viewer(manager, actor);
+    expectMayWrite(viewer, (await sharedById(manager, 'entry', [entryId])).get(entryId));
   }
 
   private async record(
@@ -174,7 +260,11 @@ export class EntriesService {
     entryId: string,
     details: Record<string, unknown> = {},
   ): Promise<void> {
-    await recordContribution(manager, calendarId, actor.person.id, this.clock.now());
+    // Whoever writes what its people keep compiles nothing for the village, and leaves no trace in its draft.
+    const shared = (await sharedById(manager, 'entry', [entryId])).get(entryId);
+    if (shared !== undefined && !isKept(shared)) {
+      await recordContribution(manager, calendarId, actor.person.id, this.clock.now());
+    }
     await this.audit(manager, actor, action, 'entry', entryId, { calendarId, ...details });
   }
 
@@ -198,6 +288,10 @@ export class EntriesService {
   }
 }
 
+function thingOf({ id, content }: EntryEntity): SeenThing {
+  return { entryId: id, markerKey: markerKeyOfLead(content.lead) };
+}
+
 async function liveEntry(manager: EntityManager, calendarId: string, entryId: string): Promise<EntryEntity> {
   const row = await manager.findOneBy(EntryEntity, { id: entryId, calendarId });
   if (row === null || row.deletedAt !== null) throw notFound();
@@ -210,13 +304,13 @@ async function liveEntry(manager: EntityManager, calendarId: string, entryId: st
  */
 async function expectKnownMarker(
   manager: EntityManager,
-  { communityId }: CalendarEntity,
+  viewer: Viewer,
   { lead }: EntryInput,
   field: string,
 ): Promise<void> {
   const markerKey = markerKeyOfLead(lead);
   if (markerKey === null) return;
-  if (knowsMarker(markerKey, await villageFigures(manager, communityId))) return;
+  if (knowsMarker(markerKey, await figuresSeenBy(manager, viewer))) return;
   throw invalidField(
     lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
     'unknown-marker',

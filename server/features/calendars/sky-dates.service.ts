@@ -60,7 +60,8 @@ export function markerKeyOfLead(lead: EntryLead): string | null {
   return lead.type === 'sky' && 'markerKey' in lead.spec ? lead.spec.markerKey : null;
 }
 
-function markerKeysOf(contents: readonly EntryInput[]): string[] {
+/** The stars and figures that entries go by, each once and sorted. */
+export function markerKeysOf(contents: readonly EntryInput[]): string[] {
   return [...new Set(contents.flatMap(({ lead }) => markerKeyOfLead(lead) ?? []))].sort();
 }
 

@@ -16,7 +16,12 @@ import { FrozenContentService } from '../versions/frozen-content.service.js';
 import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
 import { DEMO_DOMAIN, UPPER_TAZIMEL } from './demo-villages.data.js';
-import { SECOND_ROUND, STANDING_DIFFERENCE, TAZIMEL_ENTRIES } from './tazimel-entries.data.js';
+import {
+  SECOND_ROUND,
+  STANDING_DIFFERENCE,
+  TAZIMEL_ENTRIES,
+  WITHHELD_ENTRY,
+} from './tazimel-entries.data.js';
 
 const DEMO_YEAR = 2027;
 const SUBMISSIONS = 2;
@@ -34,6 +39,8 @@ export async function seedDemoCalendar(dataSource: DataSource, clock: Clock): Pr
   if (begun !== null) await calendars.delete({ id: begun.id });
   await new DemoRound(dataSource, clock, cast).play();
 }
+
+const AGREED = { answer: 'agree', note: '', onBehalfOf: null, witness: null } as const;
 
 interface Cast {
   placeId: string;
@@ -73,6 +80,7 @@ class DemoRound {
   private readonly answers: AnswersService;
   private readonly signing: SigningService;
   private calendarId = '';
+  private withheldId = '';
   private readonly idByCode = new Map<string, string>();
 
   constructor(
@@ -83,7 +91,7 @@ class DemoRound {
     this.at = subDays(clock.now(), 24);
     const playClock = { now: () => this.at };
     const sky = new SkyDatesService();
-    const versions = new VersionsService(dataSource);
+    const versions = new VersionsService(dataSource, playClock);
     const contents = new FrozenContentService(dataSource, playClock, sky);
     this.calendars = new CalendarsService(dataSource, playClock);
     this.entries = new EntriesService(dataSource, playClock, sky);
@@ -105,6 +113,7 @@ class DemoRound {
     for (const { code, content } of TAZIMEL_ENTRIES) {
       this.idByCode.set(code, (await this.entries.add(officer, id, content)).id);
     }
+    this.withheldId = (await this.entries.add(this.cast.elder3, id, WITHHELD_ENTRY)).id;
     this.daysLater(3);
   }
 
@@ -116,6 +125,7 @@ class DemoRound {
     for (const who of [elder, elder2, elder3]) {
       for (const { code } of TAZIMEL_ENTRIES) await this.answer(who, number, code, 'agree', '');
     }
+    await this.answers.put(elder3, this.calendarId, number, this.withheldId, AGREED);
     await this.sign(elder2, number, 'elder');
     await this.sign(elder, number, 'elder');
     this.daysLater(1);
@@ -128,7 +138,7 @@ class DemoRound {
   private async secondRound(): Promise<void> {
     const { officer, elder, elder3 } = this.cast;
     for (const { code, change } of SECOND_ROUND) {
-      const entry = (await this.entries.list(this.calendarId)).find(
+      const entry = (await this.entries.list(officer, this.calendarId)).items.find(
         ({ id }) => id === this.idByCode.get(code),
       );
       if (!entry) throw new Error(`The demo has no entry ${code}`);

@@ -348,6 +348,35 @@ export const TAZIMEL_ENTRIES: readonly { code: string; content: EntryInput }[] =
   },
 ];
 
+/** What Elder A-3 gave for the elders alone, to be told in August. Invented, like everything here. */
+export const WITHHELD_ENTRY: EntryInput = {
+  titleVillage: 'Sìlɛ ɗúma',
+  titleOfficer: 'The quiet evening',
+  kind: 'belief',
+  icon: 'lamp',
+  crop: '',
+  notes:
+    'The lamps are lit from the upper end of the village down, and nobody speaks until the last one burns.',
+  caution: '',
+  lead: { type: 'marker', markerKey: 'hr-2326', phenomenon: 'heliacal-rising', occurrence: 1 },
+  offsets: { earliestDays: 2, bestFromDays: 2, bestToDays: 11, lastAdvisedDays: 11 },
+  hasLastDate: false,
+  lastDate: null,
+  protectiveWatch: false,
+  otherSigns: '',
+  ifLate: '',
+  giver: 'Elder A-3',
+  agreedToPrint: false,
+  sharingLevel: 'elders',
+  sharing: {
+    groupId: null,
+    trace: 'blank',
+    tellingSeason: { from: { month: 8, day: 1 }, to: { month: 8, day: 31 } },
+    successorId: null,
+    naming: 'role',
+  },
+};
+
 /** What the officer changed after 2027-1, and what Elder A-1 said to it. */
 export const SECOND_ROUND: readonly { code: string; change: Partial<EntryInput>; note: string }[] = [
   {

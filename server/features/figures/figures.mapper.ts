@@ -1,6 +1,7 @@
 import type { Figure, FigureInput, FigureUse } from '#shared/contracts/figures.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import type { EntryEntity } from '../../db/entities/entry.entity.js';
+import type { Shared } from '../../policy/policy.js';
 import type { FigureEntity } from '../../db/entities/figure.entity.js';
 
 const OWN_DEPTHS_SOURCE = 'depths that the village set for this figure';
@@ -10,9 +11,21 @@ export function markerKeyOfFigure(figureId: string): string {
   return `f-${figureId}`;
 }
 
-export function toFigure(row: FigureEntity, updatedByName: string): Figure {
+export interface FigureFacts {
+  row: FigureEntity;
+  shared: Shared;
+  /** Null where story and variants are not for this person. */
+  story: Shared | null;
+  updatedByName: string;
+}
+
+export function toFigure({ row, shared, story, updatedByName }: FigureFacts): Figure {
   return {
     ...fromFigureInput(row),
+    ...(story === null ? { story: '', variants: [] } : { storyLevel: story.level }),
+    storyShown: story !== null,
+    sharingLevel: shared.level,
+    sharing: shared.details,
     id: row.id,
     communityId: row.communityId,
     markerKey: markerKeyOfFigure(row.id),
@@ -22,8 +35,10 @@ export function toFigure(row: FigureEntity, updatedByName: string): Figure {
   };
 }
 
+type FigureColumns = Omit<FigureInput, 'sharingLevel' | 'sharing' | 'storyLevel'>;
+
 /** The columns have the names of the fields; written out, so that nothing else ever passes. */
-export function fromFigureInput(input: FigureInput): FigureInput {
+export function fromFigureInput(input: FigureColumns): FigureColumns {
   return {
     names: input.names,
     story: input.story,
@@ -32,7 +47,6 @@ export function fromFigureInput(input: FigureInput): FigureInput {
     indicatorHr: input.indicatorHr,
     patch: input.patch,
     ownDepths: input.ownDepths,
-    sharingLevel: input.sharingLevel,
   };
 }
 

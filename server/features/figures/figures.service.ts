@@ -14,9 +14,14 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { maySee } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { personNames } from '../people/person-names.service.js';
-import { fromFigureInput, markerKeyOfFigure, toFigure, toFigureUse } from './figures.mapper.js';
+import { recordKeptReads } from '../audit/kept-reads.service.js';
+import { shareChangedFigure, shareNewFigure } from './figure-sharing.service.js';
+import { fromFigureInput, markerKeyOfFigure, toFigureUse } from './figures.mapper.js';
+import { seenFigures, seenUses } from './seen-figures.service.js';
 import { entriesThatGoBy, figureRows } from './figures.repository.js';
 
 type Action = 'figure-added' | 'figure-changed' | 'figure-taken-out' | 'figure-put-back';
@@ -32,15 +37,19 @@ export class FiguresService {
   async list(actor: Actor): Promise<Figure[]> {
     const { manager } = this.dataSource;
     const rows = await figureRows(manager, actor.communityId, false);
-    const names = await personNames(
-      manager,
-      rows.map(({ updatedBy }) => updatedBy),
-    );
-    return rows.map((row) => toFigure(row, names.get(row.updatedBy) ?? ''));
+    const viewer = await this.viewer(manager, actor);
+    const figures = await seenFigures(manager, viewer, rows);
+    const ids = figures.map(({ id }) => id);
+    await recordKeptReads(manager, viewer, this.clock.now(), 'figure', ids);
+    return figures;
+  }
+
+  private viewer(manager: EntityManager, actor: Actor): Promise<Viewer> {
+    return viewerOf(manager, actor, this.clock.now());
   }
 
   async read(actor: Actor, figureId: string): Promise<FigureDetail> {
-    return describe(this.dataSource.manager, actor, figureId);
+    return this.describe(this.dataSource.manager, actor, figureId);
   }
 
   async create(actor: Actor, input: FigureInput): Promise<FigureDetail> {
@@ -55,8 +64,9 @@ export class FiguresService {
         takenOutAt: null,
         ...this.touchedBy(actor),
       });
+      await shareNewFigure(manager, actor, id, input);
       await this.record(manager, actor, 'figure-added', id);
-      return describe(manager, actor, id);
+      return this.describe(manager, actor, id);
     });
   }
 
@@ -65,10 +75,15 @@ export class FiguresService {
     expectKnownStars(input);
     const { version } = input;
     return inTransaction(this.dataSource, async (manager) => {
-      const row = await findFigure(manager, actor, figureId, { mode: 'pessimistic_write' });
-      if (row.version !== version) throw stale(await describe(manager, actor, figureId), input);
-      const changes = fromFigureInput(input);
-      const fields = changedFields(fromFigureInput(row), changes);
+      const row = await this.find(manager, actor, figureId, { mode: 'pessimistic_write' });
+      if (row.version !== version) throw stale(await this.describe(manager, actor, figureId), input);
+      const { storyShown } = await this.describe(manager, actor, figureId);
+      // A story that somebody does not see is not theirs to overwrite with the nothing that they were shown.
+      const changes = fromFigureInput(
+        storyShown ? input : { ...input, story: row.story, variants: row.variants },
+      );
+      const shared = await shareChangedFigure(manager, figureId, input, storyShown);
+      const fields = [...changedFields(fromFigureInput(row), changes), ...(shared ? ['sharingLevel'] : [])];
       if (fields.length > 0) {
         await manager.update(
           FigureEntity,
@@ -77,19 +92,20 @@ export class FiguresService {
         );
         await this.record(manager, actor, 'figure-changed', figureId, { fields });
       }
-      return describe(manager, actor, figureId);
+      return this.describe(manager, actor, figureId);
     });
   }
 
   /** Refused while an entry of a draft goes by it, with those entries named. */
   async remove(actor: Actor, figureId: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
-      await findFigure(manager, actor, figureId, { mode: 'pessimistic_write' });
+      await this.find(manager, actor, figureId, { mode: 'pessimistic_write' });
       const uses = await entriesThatGoBy(manager, actor.communityId, markerKeyOfFigure(figureId));
       if (uses.length > 0) {
+        const seen = await seenUses(manager, await this.viewer(manager, actor), uses);
         throw conflict(
           'figure-in-use',
-          uses.map((entry) => toFigureUse(entry).title),
+          seen.map((entry) => toFigureUse(entry).title),
         );
       }
       await manager.update(
@@ -109,12 +125,45 @@ export class FiguresService {
         lock: { mode: 'pessimistic_write' },
       });
       if (row === null) throw notFound();
+      await this.expectSeen(manager, actor, figureId);
       if (row.takenOutAt === null) throw conflict('figure-is-there');
       await this.expectRoom(manager, actor);
       await manager.update(FigureEntity, { id: figureId }, { takenOutAt: null, ...this.touchedBy(actor) });
       await this.record(manager, actor, 'figure-put-back', figureId);
-      return describe(manager, actor, figureId);
+      return this.describe(manager, actor, figureId);
     });
+  }
+
+  private async find(
+    manager: EntityManager,
+    actor: Actor,
+    figureId: string,
+    lock?: { mode: 'pessimistic_write' },
+  ): Promise<FigureEntity> {
+    const row = await manager.findOne(FigureEntity, {
+      where: { id: figureId, communityId: actor.communityId },
+      ...(lock ? { lock } : {}),
+    });
+    if (row === null || row.takenOutAt !== null) throw notFound();
+    await this.expectSeen(manager, actor, figureId);
+    return row;
+  }
+
+  private async expectSeen(manager: EntityManager, actor: Actor, figureId: string): Promise<void> {
+    const shared = await sharedById(manager, 'figure', [figureId]);
+    if (!maySee(await this.viewer(manager, actor), shared.get(figureId))) throw notFound();
+  }
+
+  /** Which draft entries go by it is for those who see drafts, and those entries. */
+  private async describe(manager: EntityManager, actor: Actor, figureId: string): Promise<FigureDetail> {
+    const row = await this.find(manager, actor, figureId);
+    const viewer = await this.viewer(manager, actor);
+    const [figure] = await seenFigures(manager, viewer, [row]);
+    if (!figure) throw notFound();
+    const uses = seesDrafts(actor)
+      ? await entriesThatGoBy(manager, actor.communityId, markerKeyOfFigure(figureId))
+      : [];
+    return { ...figure, usedBy: (await seenUses(manager, viewer, uses)).map(toFigureUse) };
   }
 
   private async expectRoom(manager: EntityManager, actor: Actor): Promise<void> {
@@ -145,38 +194,14 @@ export class FiguresService {
   }
 }
 
-async function findFigure(
-  manager: EntityManager,
-  actor: Actor,
-  figureId: string,
-  lock?: { mode: 'pessimistic_write' },
-): Promise<FigureEntity> {
-  const row = await manager.findOne(FigureEntity, {
-    where: { id: figureId, communityId: actor.communityId },
-    ...(lock ? { lock } : {}),
-  });
-  if (row === null || row.takenOutAt !== null) throw notFound();
-  return row;
-}
-
-/** Which draft entries go by it is for those who see drafts. */
-async function describe(manager: EntityManager, actor: Actor, figureId: string): Promise<FigureDetail> {
-  const row = await findFigure(manager, actor, figureId);
-  const names = await personNames(manager, [row.updatedBy]);
-  const uses = seesDrafts(actor)
-    ? await entriesThatGoBy(manager, actor.communityId, markerKeyOfFigure(figureId))
-    : [];
-  return { ...toFigure(row, names.get(row.updatedBy) ?? ''), usedBy: uses.map(toFigureUse) };
-}
-
 function expectKnownStars({ memberHrs }: FigureInput): void {
   if (memberHrs.some((hr) => findStar(hr) === null)) throw invalidField('memberHrs', 'unknown-star');
 }
 
 /** Names of the fields that differ; stories and names stay out of the record. */
-function changedFields(before: FigureInput, after: FigureInput): string[] {
+function changedFields<F extends object>(before: F, after: F): string[] {
   return Object.entries(after)
-    .filter(([field, value]) => !sameJson(before[field as keyof FigureInput], value))
+    .filter(([field, value]) => !sameJson(before[field as keyof F], value))
     .map(([field]) => field)
     .sort();
 }

@@ -78,6 +78,8 @@ export class PeopleService {
     return inTransaction(this.dataSource, async (manager) => {
       const { signOffRule } = await lockCommunity(manager, actor.communityId);
       const membership = await this.membership(manager, actor, personId);
+      const becomesElder = input.roles.includes('elder') && !membership.roles.includes('elder');
+      if (becomesElder && personId === actor.person.id) throw conflict('not-yourself');
       const losesElder = membership.roles.includes('elder') && !input.roles.includes('elder');
       if (losesElder && [...signOffRule.mustSign, ...signOffRule.oneOf].includes(personId)) {
         throw conflict('named-in-rule');

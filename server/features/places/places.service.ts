@@ -9,7 +9,8 @@ import type { Actor } from '../../http/actor.js';
 import { notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { villageFigures } from '../figures/village-figures.service.js';
+import { viewerOf } from '../../policy/viewer.js';
+import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { fromPlaceInput, toPlace } from './places.mapper.js';
 
 /** A place with the village's own figures: what dates are computed from. */
@@ -40,7 +41,9 @@ export class PlacesService {
   }
 
   async withFigures(actor: Actor, place: Place): Promise<VillagePlace> {
-    return { ...place, figures: await villageFigures(this.dataSource.manager, actor.communityId) };
+    const { manager } = this.dataSource;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    return { ...place, figures: await figuresSeenBy(manager, viewer) };
   }
 
   async create(actor: Actor, input: PlaceInput): Promise<Place> {

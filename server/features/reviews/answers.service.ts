@@ -1,6 +1,7 @@
 import { answeredCount, type ReviewState } from '#shared/calendar/sign-off.js';
 import type { AuditAction } from '#shared/contracts/audit.js';
 import type { Answer, AnswerInput, ElderProgress } from '#shared/contracts/reviews.js';
+import type { VersionEntry } from '#shared/contracts/versions.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
@@ -11,11 +12,14 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { AppError, conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { personNames } from '../people/person-names.service.js';
-import { visibleVersion } from '../versions/frozen-content.service.js';
+import { frozenContent, frozenEntry, visibleVersion } from '../versions/frozen-content.service.js';
 import { readReviewState, reviewedVersion } from '../versions/review-state.service.js';
+import { seenOfVersion, thingOf } from '../versions/seen-content.service.js';
 import { toAnswer } from './reviews.mapper.js';
 import { elderIdsOf } from './reviews.repository.js';
 
@@ -43,7 +47,8 @@ export class AnswersService {
     const { manager } = this.dataSource;
     const version = await visibleVersion(manager, actor, calendarId, number);
     const review = await readReviewState(manager, version);
-    const frozen = new Set(review.entries.map(({ entryId, hash }) => `${entryId} ${hash}`));
+    const seen = await this.seenEntries(manager, actor, version);
+    const frozen = new Set(seen.map(({ entryId, hash }) => `${entryId} ${hash}`));
     const given = await manager.find(AnswerEntity, {
       where: { calendarId },
       order: { answeredAt: 'ASC', id: 'ASC' },
@@ -58,8 +63,20 @@ export class AnswersService {
     return {
       items: rows.map((row) => toAnswer(row, names, actor.person.id)),
       nextCursor: null,
-      progress: progressOf(review, elderIds, names),
+      progress: progressOf(review, elderIds, names).map((elder) =>
+        elder.elderId === actor.person.id ? ownProgress(elder, seen, review) : elder,
+      ),
     };
+  }
+
+  private async seenEntries(
+    manager: EntityManager,
+    actor: Actor,
+    version: CalendarVersionEntity,
+  ): Promise<VersionEntry[]> {
+    const { header, entries } = await frozenContent(manager, version);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    return (await seenOfVersion(manager, viewer, version, header, entries)).entries;
   }
 
   /** For oneself as an elder, or for an elder before a witness as an officer or steward. */
@@ -75,7 +92,7 @@ export class AnswersService {
     if (!(onBehalf ? hasRole(actor, 'officer', 'steward') : hasRole(actor, 'elder'))) {
       throw new AppError('not-allowed');
     }
-    return this.inReview(calendarId, number, entryId, async (asked) => {
+    return this.inReview(actor, calendarId, number, entryId, async (asked) => {
       const { manager } = asked;
       if (onBehalf && !(await elderIdsOf(manager, actor.communityId)).includes(elderId)) {
         throw conflict('not-an-elder');
@@ -109,7 +126,7 @@ export class AnswersService {
   }
 
   async takeBack(actor: Actor, calendarId: string, number: number, entryId: string): Promise<void> {
-    await this.inReview(calendarId, number, entryId, async (asked) => {
+    await this.inReview(actor, calendarId, number, entryId, async (asked) => {
       const row = await findAnswer(asked, actor.person.id);
       if (row === null) throw notFound();
       await expectUnsigned(asked, actor.person.id, 'already-signed');
@@ -120,7 +137,7 @@ export class AnswersService {
 
   /** Also open to an elder who has signed: it takes nothing back, it only stops being in the way. */
   async letStand(actor: Actor, calendarId: string, number: number, entryId: string): Promise<Answer> {
-    return this.inReview(calendarId, number, entryId, async (asked) => {
+    return this.inReview(actor, calendarId, number, entryId, async (asked) => {
       const row = await findAnswer(asked, actor.person.id);
       if (row?.answer !== 'change-this') throw conflict('no-change-asked');
       if (!row.letStand) {
@@ -133,6 +150,7 @@ export class AnswersService {
   }
 
   private inReview<T>(
+    actor: Actor,
     calendarId: string,
     number: number,
     entryId: string,
@@ -142,9 +160,16 @@ export class AnswersService {
       await lockCalendar(manager, calendarId);
       const version = await reviewedVersion(manager, calendarId, number);
       const entry = await manager.findOneBy(VersionEntryEntity, { versionId: version.id, entryId });
-      if (entry === null) throw notFound();
+      if (entry === null || !(await this.sees(manager, actor, entry))) throw notFound();
       return work({ manager, version, entry });
     });
+  }
+
+  /** What somebody does not see is not there to be answered, by themselves or for others. */
+  private async sees(manager: EntityManager, actor: Actor, entry: VersionEntryEntity): Promise<boolean> {
+    const thing = thingOf(frozenEntry(entry));
+    const sight = await entrySight(manager, await viewerOf(manager, actor, this.clock.now()), [thing]);
+    return sight.appearance(thing) === 'full';
   }
 
   private async describe(manager: EntityManager, actor: Actor, row: AnswerEntity): Promise<Answer> {
@@ -181,6 +206,15 @@ async function expectUnsigned(
 
 async function findAnswer({ manager, entry }: Asked, elderId: string): Promise<AnswerEntity | null> {
   return manager.findOneBy(AnswerEntity, { entryId: entry.entryId, entryHash: entry.hash, elderId });
+}
+
+/** One's own count goes over everything that one sees, also what its people keep. */
+function ownProgress(
+  elder: ElderProgress,
+  seen: readonly VersionEntry[],
+  { answers }: ReviewState,
+): ElderProgress {
+  return { ...elder, answered: answeredCount(elder.elderId, seen, answers), of: seen.length };
 }
 
 /** Elders of today, and whoever signed as one and is none any more. */

@@ -52,7 +52,7 @@ export class SheetsService {
     number: string,
     query: SheetQuery,
   ): Promise<SheetModel> {
-    const { header, entries, state, label } = await this.contents.read(actor, calendarId, number);
+    const { header, entries, state, label } = await this.contents.readForBoard(actor, calendarId, number);
     const signatures =
       number === 'draft' ? [] : (await this.versions.read(actor, calendarId, Number(number))).signatures;
     return toSheetModel(

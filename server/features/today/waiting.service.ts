@@ -42,7 +42,7 @@ export class WaitingService {
 
   private async inTheMaking(actor: Actor, calendar: Calendar): Promise<WaitingItem[]> {
     if (calendar.outNumber === null) return this.ofDraft(actor, calendar);
-    const version = await this.versions.read(actor, calendar.id, calendar.outNumber);
+    const version = await this.versions.glance(actor, calendar.id, calendar.outNumber);
     const answers = await this.answers.list(actor, calendar.id, calendar.outNumber);
     return [
       ...ofSigner(actor, calendar, version, answers),

@@ -9,13 +9,17 @@ import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type { DataSource, EntityManager } from 'typeorm';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import type { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { readDraft } from '../calendars/draft.service.js';
 import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
-import { checkSeal } from './seal.service.js';
+import { viewerOf } from '../../policy/viewer.js';
+import { checkSeal, leavesOf, newSalt } from './seal.service.js';
+import { cutHeader, entriesForVillage, seenOfDraft, seenOfVersion } from './seen-content.service.js';
 import { toHeader, toVersionEntry } from './versions.mapper.js';
 import { findVersion, frozenEntries } from './versions.repository.js';
 
@@ -30,7 +34,7 @@ export interface CalendarContent {
   hash: string | null;
 }
 
-/** The one way to the content of versions and drafts: for screens, comparison and print alike. */
+/** The one way to the content of versions and drafts, for screens, comparison and print alike: cut to who asks. */
 export class FrozenContentService {
   constructor(
     private readonly dataSource: DataSource,
@@ -43,21 +47,41 @@ export class FrozenContentService {
     const { manager } = this.dataSource;
     if (number === 'draft') {
       if (!seesDrafts(actor)) throw notFound();
-      return this.draft(manager, calendarId);
+      return this.draft(manager, actor, calendarId);
     }
     const version = await visibleVersion(manager, actor, calendarId, Number(number));
-    const { header, entries } = await frozenContent(manager, version);
+    const frozen = await frozenContent(manager, version);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const { header, entries } = await seenOfVersion(manager, viewer, version, frozen.header, frozen.entries);
+    await recordKeptReads(
+      manager,
+      viewer,
+      this.clock.now(),
+      'entry',
+      entries.map(({ entryId }) => entryId),
+    );
     const { label, state, hash } = version;
     return { header, entries: entries.map(bodyOf), number: version.number, label, state, hash };
   }
 
-  private async draft(manager: EntityManager, calendarId: string): Promise<CalendarContent> {
-    const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
-    const content = await this.draftContent(manager, calendar, this.clock.now());
-    return { ...content, number: null, label: null, state: null, hash: null };
+  /** For the village's board: open and the village's entries, the same for whoever prints it. */
+  async readForBoard(actor: Actor, calendarId: string, number: string): Promise<CalendarContent> {
+    const { manager } = this.dataSource;
+    const content = await this.read(actor, calendarId, number);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const entries = await entriesForVillage(manager, viewer, content.entries);
+    return { ...content, header: cutHeader(content.header, entries).header, entries };
   }
 
-  /** Header and entries of the draft as a submission at this moment would hold them. */
+  private async draft(manager: EntityManager, actor: Actor, calendarId: string): Promise<CalendarContent> {
+    const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
+    const whole = await this.draftContent(manager, calendar, this.clock.now());
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const { header, entries } = await seenOfDraft(manager, viewer, whole.header, whole.entries);
+    return { header, entries, number: null, label: null, state: null, hash: null };
+  }
+
+  /** Header and entries of the draft as a submission at this moment would hold them: whole, and for nobody's eyes. */
   async draftContent(
     manager: EntityManager,
     calendar: CalendarEntity,
@@ -81,6 +105,7 @@ export class FrozenContentService {
         agricultureContact: community.agricultureContact,
         place: withUsedFigures(place, contents),
         markers: this.sky.frozenMarkers(place, calendar.year, contents),
+        salt: newSalt(),
       },
       entries: entries.map(({ row, dates }) => ({ entryId: row.id, content: row.content, dates })),
     };
@@ -103,15 +128,22 @@ export function isVisible(actor: Actor, state: VersionState): boolean {
   return seesDrafts(actor) || wasPublished(state);
 }
 
-/** Reads back exactly what was frozen, or throws a BrokenSealError. */
+/** Reads back exactly what was frozen, or throws a BrokenSealError. Whole: what goes out is cut to who asks. */
 export async function frozenContent(
   manager: EntityManager,
   version: CalendarVersionEntity,
-): Promise<{ header: VersionHeader; entries: VersionEntry[] }> {
+): Promise<{ header: VersionHeader; entries: VersionEntry[]; leaves: string[] }> {
   const rows = await frozenEntries(manager, version.id);
-  const { headerText, headerHash, hash } = version;
-  checkSeal({ headerText, headerHash, hash, entries: rows });
-  return { header: toHeader(version), entries: rows.map(toVersionEntry) };
+  const { headerText, headerHash, hash, leaves } = version;
+  const scheme = version.scheme === 1 ? 1 : 2;
+  const sealed = { scheme, headerText, headerHash, hash, leaves, entries: rows } as const;
+  checkSeal(sealed);
+  return { header: toHeader(version), entries: rows.map(toVersionEntry), leaves: leavesOf(sealed) };
+}
+
+/** One entry as it was frozen. */
+export function frozenEntry(row: VersionEntryEntity): VersionEntry {
+  return toVersionEntry(row);
 }
 
 function bodyOf({ entryId, content, dates }: VersionEntry): VersionEntryBody {

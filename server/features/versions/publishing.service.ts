@@ -14,6 +14,7 @@ import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { draftWriterIds, forgetContributions, lockCalendar } from '../calendars/draft.service.js';
 import type { FrozenContentService } from './frozen-content.service.js';
+import { settleKeptEntries } from './kept-entries.service.js';
 import { seal, type SealedEntry } from './seal.service.js';
 import { earlierSeals, findVersion } from './versions.repository.js';
 import type { VersionsService } from './versions.service.js';
@@ -49,6 +50,9 @@ export class PublishingService {
         headerText: sealed.headerText,
         headerHash: sealed.headerHash,
         hash: sealed.hash,
+        scheme: sealed.scheme,
+        leaves: sealed.leaves,
+        withdrawnTraces: 0,
         signOffRule: community.signOffRule,
         writerIds: await draftWriterIds(manager, calendarId),
         submittedBy: actor.person.id,
@@ -107,6 +111,7 @@ export class PublishingService {
           { outNumber: null, publishedNumber: number, labelCount: calendar.labelCount + 1, updatedAt: at },
         );
         await forgetContributions(manager, calendarId);
+        await settleKeptEntries(manager, row);
         await this.record(manager, actor, row, 'published', { label });
         return { label, publishedAt: at };
       },

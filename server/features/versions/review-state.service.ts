@@ -2,20 +2,21 @@ import type { ReviewState } from '#shared/calendar/sign-off.js';
 import type { EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
-import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import { keptEntryIds } from '../../policy/entry-sight.js';
 import { conflict, notFound } from '../../http/app-error.js';
-import { findVersion, signaturesOf } from './versions.repository.js';
+import { thingOf } from './seen-content.service.js';
+import { toVersionEntry } from './versions.mapper.js';
+import { findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
 
-/** Everything that decides whether a submission is signed off, as it stands in the database now. */
+/**
+ * Everything that decides whether a submission is signed off, as it stands in the database now. What is kept by its
+ * people is not among the entries: they answer for it, and the village's signatures do not wait for it.
+ */
 export async function readReviewState(
   manager: EntityManager,
   version: CalendarVersionEntity,
 ): Promise<ReviewState> {
-  const entries = await manager.find(VersionEntryEntity, {
-    where: { versionId: version.id },
-    select: { id: true, entryId: true, hash: true },
-    order: { position: 'ASC' },
-  });
+  const entries = (await frozenThings(manager, version.id)).filter(({ isKept }) => !isKept);
   return {
     rule: version.signOffRule,
     entries: entries.map(({ entryId, hash }) => ({ entryId, hash })),
@@ -23,6 +24,17 @@ export async function readReviewState(
     signatures: await signaturesOf(manager, version.id),
     writerIds: new Set(version.writerIds),
   };
+}
+
+/** The frozen entries with their hashes, and which of them are kept by their people. */
+async function frozenThings(
+  manager: EntityManager,
+  versionId: string,
+): Promise<{ entryId: string; hash: string; isKept: boolean }[]> {
+  const rows = await frozenEntries(manager, versionId);
+  const things = rows.map((row) => ({ hash: row.hash, ...thingOf(toVersionEntry(row)) }));
+  const kept = await keptEntryIds(manager, things);
+  return things.map(({ entryId, hash }) => ({ entryId, hash, isKept: kept.has(entryId) }));
 }
 
 /** The submission, if it can be answered and signed now. */

@@ -1,20 +1,35 @@
-import { entryBodyText, entryHashText, versionHashText } from '#shared/calendar/hash-text.js';
+import {
+  entryBodyText,
+  entryHashText,
+  leafText,
+  versionHashText,
+  type HashScheme,
+} from '#shared/calendar/hash-text.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
-import { createHash, randomBytes } from 'node:crypto';
+import { createHash, randomBytes, randomInt } from 'node:crypto';
 import type { EntrySeal } from './versions.repository.js';
 
 const SALT_BYTES = 16;
 
+/** Leaves are filled up to a multiple of this, with at least one that belongs to nothing. */
+const LEAVES_STEP = 16;
+const RANK_STEP_MAX = 65_536;
+
 export interface SealedEntry extends EntrySeal {
   entryId: string;
   bodyText: string;
+  /** Null in versions of scheme 1. */
+  rank: number | null;
 }
 
 export interface SealedVersion {
+  scheme: HashScheme;
   headerText: string;
   headerHash: string;
   hash: string;
+  /** Null in a version of scheme 1 that is still whole. */
+  leaves: string[] | null;
   entries: SealedEntry[];
 }
 
@@ -35,33 +50,65 @@ export function seal(
 ): SealedVersion {
   const headerText = canonicalJson(header);
   const headerHash = sha256(headerText);
-  const entries = bodies.map((body): SealedEntry => {
+  let rank = 0;
+  const entries = bodies.map((body): SealedEntry & { rank: number } => {
     const bodyText = entryBodyText(body);
     const kept = earlier
       .get(body.entryId)
       ?.find(({ salt, hash }) => sha256(entryHashText(salt, bodyText)) === hash);
-    const salt = kept?.salt ?? randomBytes(SALT_BYTES).toString('hex');
-    return { entryId: body.entryId, bodyText, salt, hash: sha256(entryHashText(salt, bodyText)) };
+    const salt = kept?.salt ?? newSalt();
+    rank += randomInt(1, RANK_STEP_MAX);
+    return { entryId: body.entryId, bodyText, salt, hash: sha256(entryHashText(salt, bodyText)), rank };
   });
-  return { headerText, headerHash, hash: versionHash(headerHash, entries), entries };
+  const leaves = filledUp(entries.map((entry) => sha256(leafText(entry.rank, entry.hash))));
+  return {
+    scheme: 2,
+    headerText,
+    headerHash,
+    hash: sha256(versionHashText(2, headerHash, leaves)),
+    leaves,
+    entries,
+  };
 }
 
-/** Throws a BrokenSealError unless every hash can be made again from the stored texts. */
+export function newSalt(): string {
+  return randomBytes(SALT_BYTES).toString('hex');
+}
+
+/** Leaves of what was frozen and leaves of nothing, sorted together. */
+function filledUp(leaves: readonly string[]): string[] {
+  const length = (Math.floor(leaves.length / LEAVES_STEP) + 1) * LEAVES_STEP;
+  const empty = Array.from({ length: length - leaves.length }, () => randomBytes(32).toString('hex'));
+  return [...leaves, ...empty].sort();
+}
+
+/**
+ * Throws a BrokenSealError unless every hash can be made again from the stored texts. What was withdrawn is not
+ * among the entries any more; its leaf is.
+ */
 export function checkSeal(version: SealedVersion): void {
+  const { scheme, headerText, headerHash, hash } = version;
+  const leaves = leavesOf(version);
+  const known = new Set(leaves);
+  const ranks = version.entries.map(({ rank }) => rank ?? 0);
   const intact =
-    sha256(version.headerText) === version.headerHash &&
-    version.entries.every(({ salt, bodyText, hash }) => sha256(entryHashText(salt, bodyText)) === hash) &&
-    versionHash(version.headerHash, version.entries) === version.hash;
+    sha256(headerText) === headerHash &&
+    ranks.every((rank, index) => scheme === 1 || rank > (ranks[index - 1] ?? 0)) &&
+    version.entries.every(
+      (entry) =>
+        sha256(entryHashText(entry.salt, entry.bodyText)) === entry.hash && known.has(leafOf(scheme, entry)),
+    ) &&
+    sha256(versionHashText(scheme, headerHash, leaves)) === hash;
   if (!intact) throw new BrokenSealError('A stored version does not match its hash.');
 }
 
-function versionHash(headerHash: string, entries: readonly { hash: string }[]): string {
-  return sha256(
-    versionHashText(
-      headerHash,
-      entries.map(({ hash }) => hash),
-    ),
-  );
+/** What the version's hash goes over. */
+export function leavesOf({ leaves, entries }: Pick<SealedVersion, 'leaves' | 'entries'>): string[] {
+  return leaves ?? entries.map(({ hash }) => hash);
+}
+
+function leafOf(scheme: HashScheme, { rank, hash }: SealedEntry): string {
+  return scheme === 1 ? hash : sha256(leafText(rank ?? 0, hash));
 }
 
 function sha256(text: string): string {

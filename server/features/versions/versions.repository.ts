@@ -1,6 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { SignatureEntity } from '../../db/entities/signature.entity.js';
+import type { SeenThing } from '../../policy/entry-sight.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 
 export async function findVersion(
@@ -54,17 +55,29 @@ export async function earlierSeals(
   return seals;
 }
 
-export async function entryCountsByVersion(
+/** Which entries stand in which version, with the star or figure that each goes by. */
+export async function entriesByVersion(
   manager: EntityManager,
   calendarId: string,
-): Promise<Map<string, number>> {
+): Promise<Map<string, SeenThing[]>> {
   const rows = await manager
     .createQueryBuilder(VersionEntryEntity, 'frozen')
     .innerJoin('frozen.calendarVersion', 'version')
     .select('frozen.versionId', 'versionId')
-    .addSelect('COUNT(*)', 'count')
+    .addSelect('frozen.entryId', 'entryId')
+    .addSelect(`JSON_VALUE(frozen.bodyText, '${LEAD_MARKER_PATH}')`, 'markerKey')
+    .addSelect(`JSON_VALUE(frozen.bodyText, '${LEAD_SPEC_PATH}')`, 'specKey')
     .where('version.calendarId = :calendarId', { calendarId })
-    .groupBy('frozen.versionId')
-    .getRawMany<{ versionId: string; count: string }>();
-  return new Map(rows.map((row) => [row.versionId, Number(row.count)]));
+    .getRawMany<{ versionId: string; entryId: string; markerKey: string | null; specKey: string | null }>();
+  const things = new Map<string, SeenThing[]>();
+  for (const { versionId, entryId, markerKey, specKey } of rows) {
+    const thing = { entryId, markerKey: markerKey ?? specKey };
+    const known = things.get(versionId);
+    if (known) known.push(thing);
+    else things.set(versionId, [thing]);
+  }
+  return things;
 }
+
+const LEAD_MARKER_PATH = '$.content.lead.markerKey';
+const LEAD_SPEC_PATH = '$.content.lead.spec.markerKey';

@@ -4,15 +4,23 @@ import type { SignOffGap, Version, VersionEntry, VersionSummary } from '#shared/
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
+import type { Clock } from '../../http/context.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { viewerOf } from '../../policy/viewer.js';
+import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { frozenContent, isVisible, visibleVersion } from './frozen-content.service.js';
 import { readReviewState } from './review-state.service.js';
+import { seenOfVersion } from './seen-content.service.js';
 import { toSignature, toSummary } from './versions.mapper.js';
-import { entryCountsByVersion, signaturesOf } from './versions.repository.js';
+import { entriesByVersion, signaturesOf } from './versions.repository.js';
 
 /** Reading versions. What changes their state is in publishing.service.ts and in the reviews. */
 export class VersionsService {
-  constructor(private readonly dataSource: DataSource) {}
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+  ) {}
 
   /** Newest first; whoever sees no drafts sees what was published. */
   async list(actor: Actor, calendarId: string): Promise<VersionSummary[]> {
@@ -22,22 +30,44 @@ export class VersionsService {
       order: { number: 'DESC' },
     });
     const visible = rows.filter(({ state }) => isVisible(actor, state));
-    const counts = await entryCountsByVersion(manager, calendarId);
+    const things = await entriesByVersion(manager, calendarId);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const sight = await entrySight(manager, viewer, [...things.values()].flat());
+    const countOf = (row: CalendarVersionEntity) =>
+      (things.get(row.id) ?? []).filter((thing) => sight.appearance(thing) === 'full').length;
     const names = await personNames(
       manager,
       visible.map(({ submittedBy }) => submittedBy),
     );
-    return visible.map((row) => toSummary(row, names.get(row.submittedBy) ?? '', counts.get(row.id) ?? 0));
+    return visible.map((row) => toSummary(row, names.get(row.submittedBy) ?? '', countOf(row)));
   }
 
-  async read(actor: Actor, calendarId: string, number: number): Promise<Version> {
+  /** For counting and pointing, not for reading: nothing is written down. */
+  async glance(actor: Actor, calendarId: string, number: number): Promise<Version> {
     const { manager } = this.dataSource;
     return this.describe(manager, actor, await visibleVersion(manager, actor, calendarId, number));
   }
 
+  async read(actor: Actor, calendarId: string, number: number): Promise<Version> {
+    const { manager } = this.dataSource;
+    const version = await this.glance(actor, calendarId, number);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const ids = version.entries.map(({ entryId }) => entryId);
+    await recordKeptReads(manager, viewer, this.clock.now(), 'entry', ids);
+    return version;
+  }
+
   /** The whole version for the person who asks, with what they may do now. */
   async describe(manager: EntityManager, actor: Actor, row: CalendarVersionEntity): Promise<Version> {
-    const { header, entries } = await frozenContent(manager, row);
+    const frozen = await frozenContent(manager, row);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const { header, headerComplete, entries, keptCount } = await seenOfVersion(
+      manager,
+      viewer,
+      row,
+      frozen.header,
+      frozen.entries,
+    );
     const signatures = await signaturesOf(manager, row.id);
     const review = await readReviewState(manager, row);
     const names = await personNames(manager, [
@@ -51,6 +81,11 @@ export class VersionsService {
       stateNote: row.stateNote,
       header,
       headerHash: row.headerHash,
+      headerComplete,
+      scheme: row.scheme === 1 ? 1 : 2,
+      leaves: frozen.leaves,
+      keptCount,
+      withdrawnCount: row.withdrawnTraces,
       entries,
       signatures: signatures.map((signature) => toSignature(signature, names)),
       signOffRule: row.signOffRule,

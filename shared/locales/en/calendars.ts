@@ -34,12 +34,6 @@ export const texts = {
     community: 'community',
     household: 'household',
   },
-  level: {
-    open: 'Open',
-    openNote: 'Everybody may see it, also outside the village.',
-    village: 'Village',
-    villageNote: 'Only people of the village see it.',
-  },
 
   /** What an entry says about its days; used wherever an entry is shown. */
   days: {

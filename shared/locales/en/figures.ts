@@ -66,12 +66,9 @@ export const texts = {
     variant: 'How it is told there',
     variantMore: 'Another telling',
     variantOut: 'Take this telling out',
-    level: 'Who may see it',
-    levelHint: 'What is not for the village does not belong here yet.',
-  },
-  level: {
-    open: { name: 'Open', note: 'Everybody may see it, outside the village too.' },
-    village: { name: 'Village', note: 'Only people of this village see it.' },
+    storyLevel: 'Who may read its story and tellings',
+    storyLevelHint: 'As far as the figure, or narrower.',
+    storyKept: 'Its story and tellings are kept by their people. They stay as they are.',
   },
   patchClass: {
     'third-magnitude': {

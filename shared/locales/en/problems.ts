@@ -46,6 +46,14 @@ export const texts = {
     'answers-missing': 'Answer every entry first; then you can sign.',
     'wrote-the-draft': 'You wrote to this draft, so somebody else has to sign it.',
     'already-signed': 'You have signed this submission already.',
+    'not-the-giver': 'Its giver keeps this. Ask them to change it, or leave a note.',
+    'officers-write-this':
+      'The village’s own entries are written by its officer. Leave a note, or write one that its people keep.',
+    'too-many-groups': 'There are as many groups as a village can have.',
+    'not-of-the-group': 'Only a group’s own people say who belongs to it. Ask one of them.',
+    'nothing-asked': 'No wider sharing is asked for here any more. Load the page again.',
+    'giver-and-steward': 'A wider circle is for the giver and the steward together to allow.',
+    'not-yourself': 'Nobody makes themselves an elder. Ask another steward or the elders.',
     'figure-in-use':
       'Entries of a draft go by this figure. Let them go by something else first, then take it out.',
     'figure-is-there': 'This figure stands in the list already.',
@@ -77,6 +85,16 @@ export const texts = {
     'not-expected': 'This field is not known here. Leave it out.',
     'too-long': 'This is too long. Shorten it.',
     'too-short': 'This is too short.',
+    'choose-group': 'Choose the group that keeps this.',
+    'no-group-here': 'Only the level “Group” has a group. Leave it out.',
+    'story-wider-than-figure':
+      'A story cannot reach further than its figure. Choose the same circle or a narrower one.',
+    'wider-needs-two':
+      'A wider circle is for the giver and the steward together. Ask for it under “Who may see this”.',
+    'only-the-giver': 'Only its giver can change this.',
+    'group-of-giver': 'Give it to a group that you or its giver belong to.',
+    'not-of-this-village': 'Choose somebody of this village.',
+    'name-taken': 'A group has this name already. Choose another.',
     'one-line': 'Write this on one line.',
     'no-control-characters': 'Take out the invisible characters.',
     'not-a-number': 'Write a number.',

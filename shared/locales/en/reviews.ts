@@ -43,7 +43,6 @@ export const texts = {
   giver: 'Given by {{giver}}',
   picture:
     'Days from {{from}} to {{to}}: early from {{earliest}}, best from {{bestFrom}} to {{bestTo}}, last {{last}}.',
-  level: { open: 'Anybody may see it.', village: 'Only the village sees it.' },
   printYes: 'Asked, and agreed to print.',
   printNo: 'Nobody has agreed to print it.',
   kept: 'A difference is kept here',

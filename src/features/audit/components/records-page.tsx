@@ -14,7 +14,7 @@ import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 
 /** Who did what, newest first. `tabs` comes from the village's pages. */
 export function RecordsPage({ tabs }: { tabs: ReactNode }) {
-  const { t, i18n } = useTranslation(['audit', 'common']);
+  const { t, i18n } = useTranslation(['audit', 'common', 'sharing']);
   const { communityId, communityName } = useCurrentCommunity();
   const words = useProblemWords();
   const dates = useDateWords();

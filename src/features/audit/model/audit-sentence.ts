@@ -1,10 +1,11 @@
 import type { TFunction } from 'i18next';
 import type { AuditEvent } from '#shared/contracts/audit.js';
 import { ROLES, type Role } from '#shared/contracts/people.js';
+import { SHARING_LEVELS, type SharingLevel } from '#shared/contracts/sharing.js';
 import { texts } from '#shared/locales/en/audit.js';
 import { listWords } from '#src/lib/list-words.js';
 
-type Words = TFunction<['audit', 'common']>;
+type Words = TFunction<['audit', 'common', 'sharing']>;
 type Field = keyof typeof texts.field;
 
 /** One row of the records as a sentence. Unknown codes of a newer release become general words, never nothing. */
@@ -14,7 +15,8 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
   const roles = (value: unknown) => list(asRoles(value).map((role) => t(`common:role.${role}`)));
   return t(`audit:sentence.${event.action}`, {
     actor: event.actorName === '' ? t('audit:somebody') : event.actorName,
-    subject: event.subjectName ?? t('audit:gone'),
+    subject: event.subjectName ?? t(event.isKept ? 'audit:kept' : 'audit:gone'),
+    level: isLevel(details['to']) ? t(`sharing:level.${details['to']}.name`) : '',
     roles: roles(details['roles']),
     before: roles(details['before']),
     after: roles(details['after']),
@@ -44,6 +46,10 @@ function asRoles(value: unknown): Role[] {
 
 function asField(field: string): Field {
   return field in texts.field ? (field as Field) : 'other';
+}
+
+function isLevel(value: unknown): value is SharingLevel {
+  return SHARING_LEVELS.some((level) => level === value);
 }
 
 function isAnswer(value: unknown): value is keyof typeof texts.answer {

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
-import { SHARING_LEVELS } from '#shared/contracts/calendars.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { PersonSelect, SharingFields } from '#src/lib/sharing-fields.js';
 import { TextAreaField, TextField, TickField } from '#src/ui/field.js';
-import { PickGroup } from '#src/ui/pick.js';
 import type { FormState } from '../model/form-state.js';
 
 export function SignsFields({ form }: { form: FormState }) {
@@ -38,7 +38,7 @@ export function LateFields({ form }: { form: FormState }) {
 
 /** Whose knowledge it is, what was agreed about it, and who may see it. */
 export function WhoseFields({ form }: { form: FormState }) {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'sharing']);
   const { draft, change, at } = form;
   return (
     <div className="grid gap-4">
@@ -60,19 +60,23 @@ export function WhoseFields({ form }: { form: FormState }) {
           change({ agreedToPrint: event.currentTarget.checked });
         }}
       />
-      <PickGroup
-        label={t('form.sharingLevel')}
-        stacked
-        value={draft.sharingLevel}
-        problem={at('sharingLevel')}
-        onChange={(sharingLevel) => {
-          change({ sharingLevel });
+      <PersonSelect
+        label={t('sharing:giver')}
+        hint={t('sharing:giverHint')}
+        nobody={t('sharing:giverMe')}
+        value={draft.giverId ?? null}
+        problem={at('giverId')}
+        onChange={(giverId) => {
+          change({ giverId });
         }}
-        options={SHARING_LEVELS.map((level) => ({
-          value: level,
-          label: t(`level.${level}`),
-          note: t(`level.${level}Note`),
-        }))}
+      />
+      <SharingFields
+        label={t('form.sharingLevel')}
+        value={{ level: draft.sharingLevel, details: draft.sharing ?? PLAIN_DETAILS }}
+        problem={(field) => at(field === 'level' ? 'sharingLevel' : `sharing.${field}`)}
+        onChange={({ level, details }) => {
+          change({ sharingLevel: level, sharing: details });
+        }}
       />
     </div>
   );

@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { useSharingWords } from '#src/lib/sharing-words.js';
 import { signed } from '#src/lib/signed.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import type { Unit } from '../model/stale-choice.js';
@@ -22,6 +23,7 @@ export function UnitValue({
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
   const words = useEntryWords();
+  const sharing = useSharingWords();
   switch (unit) {
     case 'kind':
       return t(`kind.${content.kind}`);
@@ -52,7 +54,7 @@ export function UnitValue({
     case 'agreedToPrint':
       return t(content.agreedToPrint ? 'stale.yes' : 'stale.no');
     case 'sharingLevel':
-      return t(`level.${content.sharingLevel}`);
+      return sharing(content.sharingLevel, content.sharing);
     default:
       return content[unit] === '' ? (
         <span className="text-umber-soft">{t('stale.empty')}</span>

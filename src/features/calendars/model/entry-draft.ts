@@ -5,6 +5,7 @@ import {
   type EntryOffsets,
   type FixedLastDate,
 } from '#shared/contracts/calendars.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 
 type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
@@ -52,7 +53,7 @@ export function hasSign({ spec }: EntryDraft['sky']): boolean {
 
 /** What would be saved. It may still be incomplete; the contract's schema says where. */
 export function contentOf(draft: EntryDraft): EntryInput {
-  const { leadType, marker, sky, fixed, lastDate, ...rest } = draft;
+  const { leadType, marker, sky, fixed, lastDate, sharing, giverId, ...rest } = draft;
   const leads: Record<EntryLead['type'], EntryLead> = {
     marker: { type: 'marker', ...marker },
     sky: { type: 'sky', ...sky },
@@ -62,6 +63,9 @@ export function contentOf(draft: EntryDraft): EntryInput {
     ...rest,
     lead: leads[leadType],
     lastDate: draft.hasLastDate ? lastDate : null,
+    // Left out where they say nothing, so that older texts and their hashes stay as they are.
+    ...(sharing && !sameJson(sharing, PLAIN_DETAILS) ? { sharing } : {}),
+    ...(giverId ? { giverId } : {}),
   };
 }
 
@@ -99,6 +103,8 @@ export function newDraft(wanted: WantedLead | null = null): EntryDraft {
     giver: '',
     agreedToPrint: false,
     sharingLevel: 'village',
+    sharing: PLAIN_DETAILS,
+    giverId: null,
   };
 }
 

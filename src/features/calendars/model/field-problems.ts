@@ -35,7 +35,7 @@ const GROUPS: Record<FieldGroup, readonly (keyof EntryInput)[]> = {
   when: ['lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch'],
   signs: ['otherSigns'],
   late: ['ifLate'],
-  whose: ['giver', 'agreedToPrint', 'sharingLevel'],
+  whose: ['giver', 'giverId', 'agreedToPrint', 'sharingLevel', 'sharing'],
 };
 
 /** The groups that must open because something in them needs another look. */

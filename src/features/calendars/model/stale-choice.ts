@@ -20,7 +20,7 @@ export const UNITS = {
   ifLate: ['ifLate'],
   giver: ['giver'],
   agreedToPrint: ['agreedToPrint'],
-  sharingLevel: ['sharingLevel'],
+  sharingLevel: ['sharingLevel', 'sharing', 'giverId'],
 } as const satisfies Record<string, readonly (keyof EntryInput)[]>;
 
 export type Unit = keyof typeof UNITS;

@@ -6,7 +6,7 @@ import { useChartNames } from './use-chart-names.js';
 
 /** What stands in a field of a figure, as one text. */
 export function useFigureFieldWords(chart: Chart): (part: FigurePartName, figure: FigureInput) => string {
-  const { t, i18n } = useTranslation('figures');
+  const { t, i18n } = useTranslation(['figures', 'sharing']);
   const list = (words: readonly string[]) => listWords(words, i18n.language);
   const nameOf = useChartNames();
   const starName = (hr: number) => {
@@ -35,7 +35,7 @@ export function useFigureFieldWords(chart: Chart): (part: FigurePartName, figure
       case 'ownDepths':
         return figure.ownDepths === null ? t('nothing') : t('page.depths', { ...figure.ownDepths });
       case 'sharingLevel':
-        return t(`level.${figure.sharingLevel}.name`);
+        return t(`sharing:level.${figure.sharingLevel}.name`);
     }
   };
 }

@@ -68,7 +68,7 @@ export function FigurePage({ days }: { days: (markerKey: string) => ReactNode })
 }
 
 function Story({ figure }: { figure: FigureDetail }) {
-  const { t } = useTranslation('figures');
+  const { t } = useTranslation(['figures', 'sharing']);
   const lang = figure.names[0]?.tag;
   return (
     <Board title={t('page.story')}>
@@ -89,7 +89,7 @@ function Story({ figure }: { figure: FigureDetail }) {
           </p>
         </Well>
       ))}
-      <p className="mt-3 text-small text-umber-soft">{t(`level.${figure.sharingLevel}.note`)}</p>
+      <p className="mt-3 text-small text-umber-soft">{t(`sharing:level.${figure.sharingLevel}.note`)}</p>
     </Board>
   );
 }

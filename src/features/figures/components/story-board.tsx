@@ -1,26 +1,25 @@
 import { Plus, X } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import {
-  FIGURE_LEVELS,
-  FIGURE_STORY_MAX,
-  FIGURE_VARIANT_MAX,
-  FIGURE_VARIANTS_MAX,
-} from '#shared/contracts/figures.js';
+import { FIGURE_STORY_MAX, FIGURE_VARIANT_MAX, FIGURE_VARIANTS_MAX } from '#shared/contracts/figures.js';
 import { Button } from '#src/ui/button.js';
 import { TextAreaField, TextField } from '#src/ui/field.js';
+import { SHARING_LEVELS } from '#shared/contracts/sharing.js';
+import { SharingFields } from '#src/lib/sharing-fields.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board, Well } from '#src/ui/surfaces.js';
+import { narrower } from '../model/figure-draft.js';
 import type { FigurePart } from './figure-form-parts.js';
 
 /** The story as the village tells it, other tellings beside it, and who may read them. */
 export function StoryBoard({ draft, change, problem, tag }: FigurePart & { tag: string }) {
-  const { t } = useTranslation('figures');
+  const { t } = useTranslation(['figures', 'sharing']);
   const setVariant = (index: number, patch: { toldBy?: string; text?: string }) => {
     change({ variants: draft.variants.map((row, at) => (at === index ? { ...row, ...patch } : row)) });
   };
   return (
     <Board title={t('form.story')}>
       <div className="grid gap-4">
+        {!draft.storyShown && <p className="text-small text-umber-soft">{t('form.storyKept')}</p>}
         <TextAreaField
           id="figure-story"
           label={t('form.storyLabel')}
@@ -29,6 +28,7 @@ export function StoryBoard({ draft, change, problem, tag }: FigurePart & { tag: 
           lang={tag}
           maxLength={FIGURE_STORY_MAX}
           value={draft.story}
+          disabled={!draft.storyShown}
           problem={problem('story')}
           onChange={(event) => {
             change({ story: event.currentTarget.value });
@@ -84,20 +84,29 @@ export function StoryBoard({ draft, change, problem, tag }: FigurePart & { tag: 
             </Button>
           </div>
         )}
-        <PickGroup
-          label={t('form.level')}
-          hint={t('form.levelHint')}
-          stacked
-          value={draft.sharingLevel}
-          onChange={(sharingLevel) => {
-            change({ sharingLevel });
+        <SharingFields
+          value={{ level: draft.sharingLevel, details: draft.sharing }}
+          problem={(field) => problem(field === 'level' ? 'sharingLevel' : `sharing.${field}`)}
+          onChange={({ level, details }) => {
+            change({ sharingLevel: level, sharing: details, storyLevel: narrower(level, draft.storyLevel) });
           }}
-          options={FIGURE_LEVELS.map((level) => ({
-            value: level,
-            label: t(`level.${level}.name`),
-            note: t(`level.${level}.note`),
-          }))}
         />
+        {draft.storyShown && (
+          <PickGroup
+            label={t('form.storyLevel')}
+            hint={t('form.storyLevelHint')}
+            stacked
+            value={draft.storyLevel}
+            problem={problem('storyLevel')}
+            onChange={(storyLevel) => {
+              change({ storyLevel });
+            }}
+            options={SHARING_LEVELS.slice(SHARING_LEVELS.indexOf(draft.sharingLevel)).map((level) => ({
+              value: level,
+              label: t(`sharing:level.${level}.name`),
+            }))}
+          />
+        )}
       </div>
     </Board>
   );

@@ -35,7 +35,7 @@ export function useFigureDraft(
     figure === null ? `new-figure.${communityId}` : `figure.${figure.id}`,
     isFigureDraft,
   );
-  const saved = figure === null ? emptyDraft(languageTags) : draftOf(inputOf(figure));
+  const saved = figure === null ? emptyDraft(languageTags) : draftOf(inputOf(figure), figure.storyShown);
   const [draft, setDraft] = useState(keeper.found?.value ?? saved);
   const [version, setVersion] = useState(keeper.found?.baseVersion ?? figure?.version ?? null);
   const [foundAt, setFoundAt] = useState(keeper.found?.keptAt ?? null);
@@ -58,7 +58,7 @@ export function useFigureDraft(
       setFoundAt(null);
     },
     join: (joined, onto) => {
-      const next = draftOf(joined);
+      const next = draftOf(joined, figure?.storyShown);
       setDraft(next);
       setVersion(onto);
       keeper.keepDraft(next, onto);

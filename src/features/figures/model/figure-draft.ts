@@ -1,11 +1,17 @@
 import { z } from 'zod';
 import {
-  FIGURE_LEVELS,
   figureInput,
   type FigureDetail,
   type FigureInput,
   type StartingPoint,
 } from '#shared/contracts/figures.js';
+import {
+  PLAIN_DETAILS,
+  SHARING_LEVELS,
+  sharingDetails,
+  sharingLevel,
+  type SharingLevel,
+} from '#shared/contracts/sharing.js';
 import { PATCH_CLASSES } from '#shared/sky/vocabulary.js';
 import { readDeclination, readRightAscension, writeDegrees } from './sky-coordinate.js';
 
@@ -23,7 +29,11 @@ const figureDraftSchema = z.object({
   hasOwnDepths: z.boolean(),
   sameSide: z.string(),
   oppositeSide: z.string(),
-  sharingLevel: z.enum(FIGURE_LEVELS),
+  sharingLevel,
+  sharing: sharingDetails,
+  storyLevel: sharingLevel,
+  /** False where the story is not this person's to read: it stays as it is. */
+  storyShown: z.boolean(),
 });
 export type FigureDraft = z.infer<typeof figureDraftSchema>;
 
@@ -51,16 +61,21 @@ export function emptyDraft(languageTags: readonly string[]): FigureDraft {
     sameSide: '',
     oppositeSide: '',
     sharingLevel: 'village',
+    sharing: PLAIN_DETAILS,
+    storyLevel: 'village',
+    storyShown: true,
   };
 }
 
 /** The saved fields of a figure, without its ids and version. */
 export function inputOf(figure: FigureDetail | FigureInput): FigureInput {
-  const { names, story, variants, memberHrs, indicatorHr, patch, ownDepths, sharingLevel } = figure;
-  return { names, story, variants, memberHrs, indicatorHr, patch, ownDepths, sharingLevel };
+  const { names, story, variants, memberHrs, indicatorHr, patch, ownDepths } = figure;
+  const { sharingLevel: level, sharing = PLAIN_DETAILS, storyLevel = level } = figure;
+  const shared = { sharingLevel: level, sharing, storyLevel };
+  return { names, story, variants, memberHrs, indicatorHr, patch, ownDepths, ...shared };
 }
 
-export function draftOf(input: FigureInput): FigureDraft {
+export function draftOf(input: FigureInput, storyShown = true): FigureDraft {
   const { patch, ownDepths } = input;
   return {
     names: input.names.map((one) => ({ ...one })),
@@ -76,6 +91,9 @@ export function draftOf(input: FigureInput): FigureDraft {
     sameSide: ownDepths === null ? '' : String(ownDepths.sameSideDeg),
     oppositeSide: ownDepths === null ? '' : String(ownDepths.oppositeSideDeg),
     sharingLevel: input.sharingLevel,
+    sharing: input.sharing ?? PLAIN_DETAILS,
+    storyLevel: input.storyLevel ?? input.sharingLevel,
+    storyShown,
   };
 }
 
@@ -104,6 +122,8 @@ export function readDraft(draft: FigureDraft): FigureReading {
       ? { sameSideDeg: readNumber(draft.sameSide), oppositeSideDeg: readNumber(draft.oppositeSide) }
       : null,
     sharingLevel: draft.sharingLevel,
+    sharing: draft.sharing,
+    storyLevel: draft.storyLevel,
   };
   const parsed = figureInput.safeParse(candidate);
   if (parsed.success) return { ok: true, input: parsed.data };
@@ -166,6 +186,11 @@ export function toggleStar(
   return { memberHrs, indicatorHr: keeps ? draft.indicatorHr : brightest(memberHrs) };
 }
 
+/** A story reaches as far as its figure, or less far. */
+export function narrower(a: SharingLevel, b: SharingLevel): SharingLevel {
+  return SHARING_LEVELS.indexOf(a) > SHARING_LEVELS.indexOf(b) ? a : b;
+}
+
 /** What two people may have written differently; stars, their leader and a patch are one thing. */
 const FIGURE_PARTS = {
   names: ['names'],
@@ -173,7 +198,7 @@ const FIGURE_PARTS = {
   variants: ['variants'],
   sky: ['memberHrs', 'indicatorHr', 'patch'],
   ownDepths: ['ownDepths'],
-  sharingLevel: ['sharingLevel'],
+  sharingLevel: ['sharingLevel', 'sharing', 'storyLevel'],
 } as const satisfies Record<string, readonly (keyof FigureInput)[]>;
 export type FigurePartName = keyof typeof FIGURE_PARTS;
 

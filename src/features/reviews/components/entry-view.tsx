@@ -1,4 +1,5 @@
 import { Trans, useTranslation } from 'react-i18next';
+import { useSharingWords } from '#src/lib/sharing-words.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
@@ -9,6 +10,7 @@ import { EntryDays } from './entry-days.js';
 /** One entry as an elder reads it: the village's words first, then when, then everything that belongs to it. */
 export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
   const { t } = useTranslation('reviews');
+  const sharing = useSharingWords();
   const words = useDateWords();
   const { content, dates } = entry;
   const say = useEntrySentences(entry, header.markers, header.year);
@@ -63,7 +65,8 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
       )}
       <p className="text-umber-soft">
         {content.giver !== '' && `${t('giver', { giver: content.giver })}. `}
-        {t(`level.${content.sharingLevel}`)} {content.agreedToPrint ? t('printYes') : t('printNo')}
+        {sharing(content.sharingLevel, content.sharing)}.{' '}
+        {content.agreedToPrint ? t('printYes') : t('printNo')}
       </p>
     </div>
   );

@@ -11,7 +11,7 @@ import type { CompareWords } from '../model/entry-sentences.js';
 const PLAIN_YEAR = 2027;
 
 export function useCompareWords(year: number, markers: NamesByKey): CompareWords {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'sharing']);
   const dates = useDateWords();
   const entryWords = useEntryWords();
   const markerDays = useMarkerDayWords();
@@ -31,7 +31,7 @@ export function useCompareWords(year: number, markers: NamesByKey): CompareWords
         t('stale.lastDateIs', { day: dates.day({ year: PLAIN_YEAR, ...date }), source }),
       kind: (kind) => t(`kind.${kind}`),
       icon: (icon) => t(`icon.${icon}`),
-      level: (level) => t(`level.${level}`),
+      level: (level) => t(`sharing:level.${level}.name`),
     }),
     [t, dates, entryWords, markerDays, sign, markers, year],
   );

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
-import { entryBodyText, entryHashText, versionHashText } from '#shared/calendar/hash-text.js';
+import { entryBodyText, entryHashText, leafText, versionHashText } from '#shared/calendar/hash-text.js';
 
 const sha256 = (text: string) => createHash('sha256').update(text, 'utf8').digest('hex');
 
@@ -16,7 +16,8 @@ describe('hashed texts', () => {
       '00ff\n{"content":{"titleOfficer":"Sow long millet","titleVillage":"Ŋɔ́rɛ̃"},' +
         '"dates":{"warnings":[],"window":null},"entryId":"3f0c7f5e-8a4e-4c55-9c1e-0a5d9f1e2b3c"}',
     );
-    expect(versionHashText('aa', ['bb', 'cc'])).toBe('dawnpeg-version-1\naa\nbb\ncc\n');
+    expect(leafText(12, 'bb')).toBe('12\nbb');
+    expect(versionHashText(2, 'aa', ['cc', 'bb'])).toBe('dawnpeg-version-2\naa\nbb\ncc\n');
   });
 
   it('differ by salt, by content, by dates and by entry, and by nothing else', () => {
@@ -34,7 +35,15 @@ describe('hashed texts', () => {
     expect(entryBodyText(reordered)).toBe(entryBodyText(body));
   });
 
-  it('of a version depend on the order of its entries', () => {
-    expect(versionHashText('aa', ['bb', 'cc'])).not.toBe(versionHashText('aa', ['cc', 'bb']));
+  it('of a version depend on the order of its entries through their ranks alone', () => {
+    const leaves = (ranks: number[]) =>
+      ['bb', 'cc'].map((hash, index) => sha256(leafText(ranks[index] ?? 0, hash)));
+    expect(versionHashText(2, 'aa', leaves([1, 9]))).not.toBe(versionHashText(2, 'aa', leaves([9, 1])));
+    const [first = '', second = ''] = leaves([1, 9]);
+    expect(versionHashText(2, 'aa', [first, second])).toBe(versionHashText(2, 'aa', [second, first]));
+  });
+
+  it('of the first scheme go over entry hashes in order', () => {
+    expect(versionHashText(1, 'aa', ['cc', 'bb'])).toBe('dawnpeg-version-1\naa\ncc\nbb\n');
   });
 });

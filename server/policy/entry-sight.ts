@@ -1,0 +1,79 @@
+import type { EntityManager } from 'typeorm';
+import { appearance, isForVillage, isKept, type Appearance, type Shared } from './policy.js';
+import { sharedById } from './sharing.repository.js';
+import type { Viewer } from './viewer.js';
+
+/** An entry as the policy asks about it: its id, and the star or figure that it goes by. */
+export interface SeenThing {
+  entryId: string;
+  markerKey: string | null;
+}
+
+/** What one person sees of entries. An entry is never wider than the village's own figure that it goes by. */
+export interface EntrySight {
+  appearance(thing: SeenThing): Appearance;
+  /** On the village's board, in its counts and its sign-off. */
+  isForVillage(thing: SeenThing): boolean;
+  /** Answered by its own people. */
+  isKept(thing: SeenThing): boolean;
+  sharedOf(entryId: string): Shared | undefined;
+}
+
+const OWN_FIGURE = /^f-(.+)$/u;
+
+export async function entrySight(
+  manager: EntityManager,
+  viewer: Viewer,
+  things: readonly SeenThing[],
+): Promise<EntrySight> {
+  const { both, sharedOf } = await sharedOfThings(manager, things);
+  return {
+    appearance: (thing) =>
+      both(thing)
+        .map((shared) => appearance(viewer, shared))
+        .reduce(narrower),
+    isForVillage: (thing) => both(thing).every((shared) => isForVillage(shared, viewer.today)),
+    isKept: (thing) => both(thing).some((shared) => shared === undefined || isKept(shared)),
+    sharedOf,
+  };
+}
+
+/** Entries that their own people answer for, whoever asks. */
+export async function keptEntryIds(
+  manager: EntityManager,
+  things: readonly SeenThing[],
+): Promise<Set<string>> {
+  const { both } = await sharedOfThings(manager, things);
+  const kept = things.filter((thing) => both(thing).some((shared) => shared === undefined || isKept(shared)));
+  return new Set(kept.map(({ entryId }) => entryId));
+}
+
+async function sharedOfThings(manager: EntityManager, things: readonly SeenThing[]) {
+  const entries = await sharedById(
+    manager,
+    'entry',
+    things.map(({ entryId }) => entryId),
+  );
+  const figures = await sharedById(
+    manager,
+    'figure',
+    things.flatMap(({ markerKey }) => figureIdOf(markerKey) ?? []),
+  );
+  return {
+    /** The thing itself and, where it goes by one, the village's figure. */
+    both: ({ entryId, markerKey }: SeenThing): (Shared | undefined)[] => {
+      const figureId = figureIdOf(markerKey);
+      return [entries.get(entryId), ...(figureId === null ? [] : [figures.get(figureId)])];
+    },
+    sharedOf: (entryId: string) => entries.get(entryId),
+  };
+}
+
+export function figureIdOf(markerKey: string | null): string | null {
+  return OWN_FIGURE.exec(markerKey ?? '')?.[1] ?? null;
+}
+
+function narrower(a: Appearance, b: Appearance): Appearance {
+  const order: readonly Appearance[] = ['none', 'blank', 'full'];
+  return order.indexOf(a) < order.indexOf(b) ? a : b;
+}

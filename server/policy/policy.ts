@@ -1,0 +1,79 @@
+import type { SharingDetails, SharingLevel } from '#shared/contracts/sharing.js';
+import type { SharingState } from '../db/entities/item-sharing.entity.js';
+import type { Viewer } from './viewer.js';
+
+/** What the policy knows about a thing. */
+export interface Shared {
+  communityId: string;
+  level: SharingLevel;
+  details: SharingDetails;
+  giverId: string | null;
+  state: SharingState;
+  leavesTrace: boolean;
+}
+
+/** Seen whole; seen as an empty slot; not there. */
+export type Appearance = 'full' | 'blank' | 'none';
+
+/**
+ * The one decision about who sees what. Every list, count, comparison, print, letter and file asks here, and a thing
+ * that nothing is known about is not there. No role stands above the levels: a steward or officer sees what is open,
+ * the village's, or theirs.
+ */
+export function appearance(viewer: Viewer, shared: Shared | undefined): Appearance {
+  if (shared?.communityId !== viewer.communityId) return 'none';
+  if (shared.state !== 'shared') return 'none';
+  if (isTold(viewer, shared)) return 'full';
+  return effectiveLevel(shared, viewer.today) === 'sealed' ? 'none' : shared.details.trace;
+}
+
+export function maySee(viewer: Viewer, shared: Shared | undefined): boolean {
+  return appearance(viewer, shared) === 'full';
+}
+
+/** Open and the village's: what goes on the village's board, into its counts and its sign-off. */
+export function isForVillage(shared: Shared | undefined, today: string): boolean {
+  if (shared?.state !== 'shared') return false;
+  const level = effectiveLevel(shared, today);
+  return level === 'open' || level === 'village';
+}
+
+/** Outside its telling season a thing is as if sealed. */
+export function effectiveLevel(
+  { level, details }: Pick<Shared, 'level' | 'details'>,
+  today: string,
+): SharingLevel {
+  return isInSeason(details.tellingSeason, today) ? level : 'sealed';
+}
+
+/** Narrower than the village at some time of the year: such things are answered by their own people. */
+export function isKept({ level, details }: Pick<Shared, 'level' | 'details'>): boolean {
+  return details.tellingSeason !== null || (level !== 'open' && level !== 'village');
+}
+
+function isTold(viewer: Viewer, { level, details, giverId, ...shared }: Shared): boolean {
+  if (giverId === viewer.personId) return true;
+  switch (effectiveLevel({ level, details }, viewer.today)) {
+    case 'open':
+    case 'village':
+      return shared.communityId === viewer.communityId;
+    case 'group':
+      return details.groupId !== null && viewer.groupIds.has(details.groupId);
+    case 'elders':
+      return viewer.roles.includes('elder');
+    case 'sealed':
+      return details.successorId === viewer.personId;
+  }
+}
+
+/** Both days are in it; a season may reach over New Year. */
+export function isInSeason(season: SharingDetails['tellingSeason'], today: string): boolean {
+  if (season === null) return true;
+  // A season that ends with February ends with its last day, whichever that is.
+  const day =
+    Math.min(Number(today.slice(8, 10)), today.slice(5, 7) === '02' ? 28 : 31) +
+    Number(today.slice(5, 7)) * 100;
+  const from = season.from.month * 100 + season.from.day;
+  const to = season.to.month * 100 + season.to.day;
+  return from <= to ? from <= day && day <= to : day >= from || day <= to;
+}

@@ -1,0 +1,50 @@
+/** English words of sharing: who may see a thing, when, and what others see of it. */
+export const texts = {
+  title: 'Who may see this',
+  level: {
+    open: { name: 'Open', note: 'Everybody may see it, outside the village too.' },
+    village: { name: 'Village', note: 'Only people of this village see it.' },
+    group: { name: 'Group', note: 'Only the people of one group see it. It is not on the village’s board.' },
+    elders: {
+      name: 'Elders',
+      note: 'Only its giver and the elders see it. It is never printed, sent or exported.',
+    },
+    sealed: {
+      name: 'Sealed',
+      note: 'Only its giver and one successor see it. Nobody else learns that it is there.',
+    },
+  },
+  group: 'Which group keeps it',
+  groupHint: 'A group that you or its giver belong to.',
+  chooseGroup: 'Choose a group',
+  noGroups: 'The village has no groups yet. The steward or an elder founds one under Village.',
+  trace: 'What everybody else sees',
+  traces: {
+    blank: { name: 'An empty slot', note: 'Others see that something is kept here, and nothing of it.' },
+    none: { name: 'No trace', note: 'Others do not learn that it is there.' },
+  },
+  season: 'It may be told only in a part of the year',
+  seasonHint: 'Outside it, only the giver and one successor see it.',
+  seasonFrom: 'Told from',
+  seasonTo: 'Told to',
+  successor: 'Who comes after its giver',
+  successorHint: 'One person who may see it when nobody else may. It may stay empty.',
+  nobody: 'Nobody',
+  naming: 'How its giver is named',
+  namings: {
+    named: { name: 'By name', note: 'As the giver wishes to be called.' },
+    role: { name: 'By role', note: 'Shown as “an elder” or “a keeper”.' },
+    'not-named': { name: 'Not named', note: 'No word about who gave it.' },
+  },
+  giver: 'Its giver, if one of the village’s people here',
+  giverHint: 'It is theirs to make narrower and to take back.',
+  giverMe: 'Whoever writes it down',
+  summary: {
+    season: 'told from {{from}} to {{to}}',
+    group: 'kept by {{group}}',
+  },
+  kept_one: 'One more is kept by its people and is not shown to you.',
+  kept_other: '{{count}} more are kept by their people and are not shown to you.',
+  withdrawn_one: 'One entry was withdrawn.',
+  withdrawn_other: '{{count}} entries were withdrawn.',
+} as const;
