@@ -2,6 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { AuditEvent } from '#shared/contracts/audit.js';
 import type { Chart, Figure, FigureDetail } from '#shared/contracts/figures.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { addEntry, beginCalendar, openVillage } from '#tests/support/calendar-api.js';
 import { addFigure, DARK_CLOUD, figureInput } from '#tests/support/figure-api.js';
@@ -30,6 +31,9 @@ describe('adding a figure', () => {
     const figure = await addFigure(officer);
     expect(figure).toEqual({
       ...figureInput(),
+      sharing: PLAIN_DETAILS,
+      storyLevel: 'village',
+      storyShown: true,
       id: figure.id,
       communityId: officer.communityId,
       markerKey: `f-${figure.id}`,

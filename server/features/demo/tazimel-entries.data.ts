@@ -358,7 +358,7 @@ export const WITHHELD_ENTRY: EntryInput = {
   notes:
     'The lamps are lit from the upper end of the village down, and nobody speaks until the last one burns.',
   caution: '',
-  lead: { type: 'marker', markerKey: 'hr-2326', phenomenon: 'heliacal-rising', occurrence: 1 },
+  lead: { type: 'marker', markerKey: 'hr2326', phenomenon: 'heliacal-rising', occurrence: 1 },
   offsets: { earliestDays: 2, bestFromDays: 2, bestToDays: 11, lastAdvisedDays: 11 },
   hasLastDate: false,
   lastDate: null,
