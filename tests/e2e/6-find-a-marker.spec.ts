@@ -1,3 +1,4 @@
+import type { Locator, Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
 
@@ -36,6 +37,42 @@ test('an officer goes from an old sign to a well-founded one on a phone', async 
   await expect(page.getByRole('heading', { name: 'Which calendar shall go by it?' })).toBeVisible();
 });
 
+/** Nothing on the way may keep a person waiting longer, the first look through a place's whole sky included. */
+const LONGEST_WAIT_MS = 2_000;
+/** From Today to a saved entry; typing not counted. */
+const MOST_TAPS = 10;
+
+test('high in the hills the way from an old sign to a saved entry is short and never waits', async ({
+  page,
+}) => {
+  const way = await beginAt(page, 'officer2');
+  await way.tap(page.getByRole('radio', { name: /An old sign/ }));
+  const field = page.getByRole('combobox', { name: 'We used to go by' });
+  await way.tap(field);
+  await field.fill('Pleia');
+  await way.tap(
+    page.getByRole('option', { name: /Pleiades/ }),
+    page.getByText(/It has moved \d+ days later/),
+  );
+  await saveWithFirstSign(page, way, /^Tie work to /, 'Open the cold store');
+});
+
+test('beyond the arctic circle the Sun serves where no star does, on a way as short', async ({ page }) => {
+  const way = await beginAt(page, 'officer3');
+  await page.getByRole('combobox', { name: 'Month' }).selectOption('June');
+  await page.getByRole('combobox', { name: 'Day', exact: true }).selectOption('20');
+  // Two taps for each of the two lists.
+  way.taps += 4;
+  const solstice = page.getByRole('link', { name: /^Tie work to this sign: June solstice/ });
+  await way.waitFor(solstice);
+  await expect(page.getByRole('heading', { name: /No easy star serves here near 20.June/ })).toBeVisible();
+  await expect(page.getByText(/Around that time the nights stay light/)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await expectAccessible(page);
+  await saveWithFirstSign(page, way, /^Tie work to this sign: June solstice/, 'Cut the hay');
+  await expect(page.getByText(/June solstice/).last()).toBeVisible();
+});
+
 test('anybody sees how a star moved through the centuries, as a picture, a table and a file', async ({
   page,
 }) => {
@@ -56,3 +93,46 @@ test('anybody sees how a star moved through the centuries, as a picture, a table
   await page.getByRole('link', { name: /as a CSV file/ }).click();
   expect((await downloading).suggestedFilename()).toMatch(/^Pleiades from .* -3000 to 3000\.csv$/);
 });
+
+interface Way {
+  taps: number;
+  /** Taps, then waits for what the tap brings. */
+  tap: (target: Locator, brings?: Locator) => Promise<void>;
+  waitFor: (brings: Locator) => Promise<void>;
+}
+
+/** An officer at a place whose sky nobody has looked through yet, on a phone, with the finder open. */
+async function beginAt(page: Page, mailbox: string): Promise<Way> {
+  await page.setViewportSize({ width: 360, height: 740 });
+  await signIn(page, mailbox);
+  const way: Way = {
+    taps: 0,
+    tap: async (target, brings) => {
+      await target.click();
+      way.taps += 1;
+      if (brings !== undefined) await way.waitFor(brings);
+    },
+    waitFor: async (brings) => {
+      const before = Date.now();
+      await brings.first().waitFor();
+      expect(Date.now() - before, 'milliseconds waited').toBeLessThan(LONGEST_WAIT_MS);
+    },
+  };
+  const finder = page.getByRole('link', { name: 'Which sign falls near a day?' });
+  await way.tap(page.getByRole('link', { name: 'Stars' }), finder);
+  await way.tap(finder, page.getByText(/signs? within twenty days of/));
+  return way;
+}
+
+async function saveWithFirstSign(page: Page, way: Way, sign: RegExp, title: string): Promise<void> {
+  await way.tap(
+    page.getByRole('link', { name: sign }).first(),
+    page.getByRole('heading', { name: 'Which calendar shall go by it?' }),
+  );
+  const name = page.getByLabel(/^Name of the work or rite/);
+  await way.tap(page.getByRole('button', { name: 'Begin 2027' }), name);
+  await way.tap(name);
+  await name.fill(title);
+  await way.tap(page.getByRole('button', { name: 'Save the entry' }), page.getByText(`Saved: ${title}.`));
+  expect(way.taps).toBeLessThanOrEqual(MOST_TAPS);
+}
