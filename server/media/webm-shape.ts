@@ -26,14 +26,16 @@ interface Element {
 
 /**
  * Whether a file is a WebM of sound and nothing else, from its first byte to its last: only elements that such a
- * recording has, every track of sound, nothing behind the end. The last block may be cut short, as when a
- * recorder was closed in the middle.
+ * recording has, every track of sound, nothing behind the end. The last element may be cut short anywhere, as
+ * when a recorder was closed in the middle: browsers hand out slices that end within an element's head.
  */
 export async function isWebmOfSound(reader: ByteReader): Promise<boolean> {
   let soundTracks = 0;
   for (let position = 0; position < reader.size;) {
-    const element = elementAt(await reader.at(position, HEAD_BYTES), position);
-    if (element === null || (position === 0) !== (element.id === EBML)) return false;
+    const head = await reader.at(position, HEAD_BYTES);
+    const element = elementAt(head, position);
+    if (element === null) return soundTracks > 0 && isCutHead(head);
+    if ((position === 0) !== (element.id === EBML)) return false;
     const { id, from, bytes } = element;
     if (id === SEGMENT || id === CLUSTER) {
       position = from;
@@ -49,6 +51,17 @@ export async function isWebmOfSound(reader: ByteReader): Promise<boolean> {
     position = from + bytes;
   }
   return soundTracks > 0;
+}
+
+/** The first bytes of an element that such a recording has, and then the end of the file. */
+function isCutHead(head: Buffer): boolean {
+  const idLength = vintLength(head[0]);
+  if (head.length === HEAD_BYTES || idLength === 0) return false;
+  const given = Math.min(idLength, head.length);
+  return [CLUSTER, ...PLAIN].some((id) => {
+    const whole = id.toString(16).padStart(2, '0');
+    return whole.length === idLength * 2 && whole.startsWith(head.toString('hex', 0, given));
+  });
 }
 
 /** The type of each track; an entry that says none counts as 0. */

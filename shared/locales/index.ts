@@ -1,4 +1,5 @@
 import { texts as air } from './en/air.js';
+import { texts as attachments } from './en/attachments.js';
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
@@ -44,6 +45,7 @@ export const en = {
   reviews,
   sharing,
   sheets,
+  attachments,
   audit,
   print,
   problems,

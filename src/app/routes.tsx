@@ -48,7 +48,11 @@ export const villageRoutes: readonly AppRoute[] = [
     load: () => import('./routes/village-figures.js'),
   },
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
-  { path: PATTERNS.figure, texts: ['figures', 'stars', 'sky'], load: () => import('./routes/figure.js') },
+  {
+    path: PATTERNS.figure,
+    texts: ['figures', 'stars', 'sky', 'attachments'],
+    load: () => import('./routes/figure.js'),
+  },
   { path: PATTERNS.changeFigure, texts: ['figures'], load: () => import('./routes/figure-change.js') },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
   {
@@ -59,7 +63,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'sky'],
+    texts: ['calendars', 'versions', 'sky', 'attachments'],
     load: () => import('./routes/calendar.js'),
   },
   {
@@ -80,7 +84,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,
-    texts: ['reviews', 'sky'],
+    texts: ['reviews', 'sky', 'attachments'],
     load: () => import('./routes/review.js'),
     rail: false,
   },

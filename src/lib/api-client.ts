@@ -70,7 +70,7 @@ async function send(endpoint: Endpoint, input: LooseInput, mayRenew: boolean): P
   throw problem;
 }
 
-async function renewCsrfToken(): Promise<string> {
+export async function renewCsrfToken(): Promise<string> {
   const response = await fetchOrOffline('/api/session', { headers: { Accept: 'application/json' } });
   if (!response.ok) throw await readProblem(response);
   const state = sessionState.parse(await response.json());

@@ -1,3 +1,4 @@
+import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { TakeBack } from '#src/features/versions/components/take-back.js';
 
@@ -8,6 +9,13 @@ export function Component() {
       lockedAction={({ id, outNumber }, isOfficer) =>
         isOfficer && outNumber !== null ? <TakeBack calendarId={id} number={outNumber} /> : null
       }
+      voices={(communityId, entryId) => (
+        <AttachmentsPanel
+          key={entryId}
+          communityId={communityId}
+          subject={{ subjectType: 'entry', subjectId: entryId }}
+        />
+      )}
     />
   );
 }

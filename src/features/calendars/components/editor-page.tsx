@@ -18,10 +18,12 @@ import { useFormState } from './use-form-state.js';
 interface EditorPageProps {
   /** The way out of a locked draft: "take it back". It belongs to the versions. */
   lockedAction: (calendar: Calendar, isOfficer: boolean) => ReactNode;
+  /** What was spoken and photographed about a saved entry. */
+  voices: (communityId: string, entryId: string) => ReactNode;
 }
 
 /** The draft of a calendar: the year's strip, its entries, and the one that is open. */
-export function EditorPage({ lockedAction }: EditorPageProps) {
+export function EditorPage({ lockedAction, voices }: EditorPageProps) {
   const { calendarId = '' } = useParams();
   const { data: calendar } = useSuspenseQuery(calendarQuery(calendarId));
   const { seesDrafts, isOfficer } = useRolesIn(calendar.communityId);
@@ -32,6 +34,7 @@ export function EditorPage({ lockedAction }: EditorPageProps) {
       calendar={calendar}
       isOfficer={isOfficer}
       lockedAction={lockedAction(calendar, isOfficer)}
+      voices={(entryId) => voices(calendar.communityId, entryId)}
     />
   );
 }
@@ -40,9 +43,10 @@ interface DraftEditorProps {
   calendar: Calendar;
   isOfficer: boolean;
   lockedAction: ReactNode;
+  voices: (entryId: string) => ReactNode;
 }
 
-function DraftEditor({ calendar, isOfficer, lockedAction }: DraftEditorProps) {
+function DraftEditor({ calendar, isOfficer, lockedAction, voices }: DraftEditorProps) {
   const { t } = useTranslation('calendars');
   const editor = useEditor(calendar, isOfficer);
   useWantedMarker(editor);
@@ -57,6 +61,7 @@ function DraftEditor({ calendar, isOfficer, lockedAction }: DraftEditorProps) {
     actions,
     form,
     lockedAction,
+    voices,
     onSubmit: () => {
       setIsSubmitting(true);
     },

@@ -5,6 +5,7 @@ import { paths } from '#src/lib/paths.js';
 import { Button } from '#src/ui/button.js';
 import { Mast, Page, ThumbBar } from '#src/ui/page.js';
 import type { FormState } from '../model/form-state.js';
+import type { ShownEntry } from '../model/preview-dates.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
@@ -23,6 +24,7 @@ export interface ViewParts {
   actions: EntryActions;
   form: FormState | null;
   lockedAction: ReactNode;
+  voices: (entryId: string) => ReactNode;
   onSubmit: () => void;
 }
 
@@ -128,10 +130,19 @@ function Notes({ editor, lockedAction }: ViewParts) {
   );
 }
 
-function OpenEntry({ editor, saving, actions, form }: ViewParts) {
+function OpenEntry(parts: ViewParts) {
   const { t } = useTranslation('calendars');
-  const { selected } = editor;
+  const { selected } = parts.editor;
   if (selected === null) return <p className="text-umber-soft">{t('editor.chooseOne')}</p>;
+  return (
+    <div className="grid min-w-0 gap-4">
+      <EntryBoard {...parts} selected={selected} />
+      {selected.saved !== null && parts.voices(selected.id)}
+    </div>
+  );
+}
+
+function EntryBoard({ editor, saving, actions, form, selected }: ViewParts & { selected: ShownEntry }) {
   if (!editor.canWrite || form === null) {
     return <EntryReading editor={editor} entry={selected} answers={editor.answers.get(selected.id)} />;
   }

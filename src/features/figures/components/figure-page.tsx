@@ -20,8 +20,14 @@ import { FigureUses } from './figure-uses.js';
 import { StarChart } from './star-chart.js';
 import { useChartNames } from './use-chart-names.js';
 
+interface FigurePageProps {
+  days: (markerKey: string) => ReactNode;
+  /** What people recorded and photographed about it. */
+  voices: (figure: FigureDetail) => ReactNode;
+}
+
 /** A figure to read: names, story, other tellings, where it is in the sky, and its four days. */
-export function FigurePage({ days }: { days: (markerKey: string) => ReactNode }) {
+export function FigurePage({ days, voices }: FigurePageProps) {
   const { t } = useTranslation('figures');
   const { figureId = '' } = useParams();
   const { communityId } = useCurrentCommunity();
@@ -52,6 +58,7 @@ export function FigurePage({ days }: { days: (markerKey: string) => ReactNode })
         <div className="grid gap-4">
           <Story figure={figure} />
           <InTheSky figure={figure} />
+          {voices(figure)}
           {mayWrite && <FigureUses figure={figure} />}
         </div>
         <div className="grid gap-4">

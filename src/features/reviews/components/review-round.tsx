@@ -1,5 +1,5 @@
 import { ArrowLeft, ArrowRight } from 'lucide-react';
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
 import type { Answer, ElderProgress } from '#shared/contracts/reviews.js';
@@ -17,15 +17,20 @@ import { ForWhom, type Spokesman } from './for-whom.js';
 import { OthersWords } from './others-words.js';
 import { ReviewEnd } from './review-end.js';
 
+/** What was spoken and photographed about an entry, with the way to add more. */
+export type Voices = (entryId: string) => ReactNode;
+
 const END = 'end';
 
 /** Goes through the entries; the address holds where one is, so that going back and a reload keep the place. */
 export function ReviewRound({
   version,
   answers,
+  voices,
 }: {
   version: Version;
   answers: { items: Answer[]; progress: ElderProgress[] };
+  voices: Voices;
 }) {
   const { t } = useTranslation('reviews');
   const { is } = useRoles();
@@ -98,6 +103,7 @@ export function ReviewRound({
                 (each) => each.entryId === entry.entryId && each.elderId !== elderId,
               )}
             />
+            {voices(entry.entryId)}
             <p className="text-umber-soft">{t('silence')}</p>
             <div className="flex flex-wrap justify-between gap-2">
               <Button

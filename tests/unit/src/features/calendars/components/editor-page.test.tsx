@@ -74,11 +74,14 @@ const draft = (...changes: Partial<EntryInput>[]): Saved => ({
 });
 
 const open = (search = '', session = OFFICER) =>
-  renderOnBoard(<EditorPage lockedAction={() => <button type="button">Take it back</button>} />, {
-    session,
-    path: `/calendars/${CALENDAR.id}${search}`,
-    pattern: '/calendars/:calendarId',
-  });
+  renderOnBoard(
+    <EditorPage voices={() => null} lockedAction={() => <button type="button">Take it back</button>} />,
+    {
+      session,
+      path: `/calendars/${CALENDAR.id}${search}`,
+      pattern: '/calendars/:calendarId',
+    },
+  );
 
 const save = () => screen.getByRole('button', { name: /Save the entry/ });
 const days = (name: string) => screen.findByRole<HTMLInputElement>('spinbutton', { name: new RegExp(name) });
