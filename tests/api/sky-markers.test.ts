@@ -62,6 +62,18 @@ describe('the signs that are offered at a place', () => {
   });
 });
 
+describe('stars due on the meridian', () => {
+  it('are offered on the side on which they are highest, also those that pass on the other side of the zenith', async () => {
+    const facingOf = async (markerKey: string) =>
+      (await offered(place)).flatMap(({ spec }) =>
+        spec.kind === 'due-meridian' && spec.markerKey === markerKey ? [spec.facing] : [],
+      );
+    // At 12° N: Sirius at −17°, Capella at 46° of declination.
+    expect(await facingOf('hr2491')).toEqual(['south']);
+    expect(await facingOf('hr1708')).toEqual(['north']);
+  });
+});
+
 describe('one sign', () => {
   it('is computed by the engine, with the direction in words and the clock time of the place', async () => {
     const found = await compute(north, NOON_SUN);

@@ -34,7 +34,7 @@ const KNOWN_KEYS: readonly string[] = [
  * of the skyline have names that only the village knows, so sunrise over a point is asked for and not offered.
  */
 export function offeredSpecs(place: WatchedPlace): SkyMarkerSpec[] {
-  const { latitudeDeg } = place;
+  const facings = place.latitudeDeg >= 0 ? (['south', 'north'] as const) : (['north', 'south'] as const);
   const keys = [...figuresOf(place).map(({ key }) => key), ...KNOWN_KEYS];
   return [
     ...SUN_SEASONS.map((season) => ({ kind: 'sun-season' as const, season })),
@@ -52,12 +52,15 @@ export function offeredSpecs(place: WatchedPlace): SkyMarkerSpec[] {
       count: 1,
     })),
     ...VENUS_APPEARANCES.map((appearance) => ({ kind: 'venus-appearance' as const, appearance })),
-    ...keys.map((markerKey) => ({
-      kind: 'due-meridian' as const,
-      markerKey,
-      facing: latitudeDeg >= 0 ? ('south' as const) : ('north' as const),
-      solarHour: EVENING_HOUR,
-    })),
+    // Most stars are highest on the side of the equator; those near the other pole on the other one.
+    ...keys.flatMap((markerKey) =>
+      facings.map((facing) => ({
+        kind: 'due-meridian' as const,
+        markerKey,
+        facing,
+        solarHour: EVENING_HOUR,
+      })),
+    ),
     ...keys.map((markerKey) => ({
       kind: 'culmination' as const,
       markerKey,

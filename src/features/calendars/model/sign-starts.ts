@@ -1,4 +1,5 @@
 import type { SkyMarkerSpec, SkyMarkerYear } from '#shared/contracts/sky-markers.js';
+import type { Facing } from '#shared/sky/vocabulary.js';
 import { textFits } from '#src/ui/combo-field.js';
 
 /** Kinds whose parameters only the village knows: they are set up, not picked from a list. */
@@ -21,11 +22,8 @@ export function startOf(
   offered: readonly Pick<SkyMarkerYear, 'spec'>[],
 ): SkyMarkerSpec {
   switch (kind) {
-    case 'due-meridian': {
-      // The side on which stars are highest here: whatever the place's own list says.
-      const known = offered.map(({ spec }) => spec).find((spec) => spec.kind === 'due-meridian');
-      return { kind, markerKey, facing: known?.facing ?? 'south', solarHour: 21 };
-    }
+    case 'due-meridian':
+      return { kind, markerKey, facing: facingOf(markerKey, offered), solarHour: 21 };
     case 'culmination':
       return { kind, markerKey, twilight: 'dusk', depthDeg: 12 };
     case 'star-altitude':
@@ -43,6 +41,15 @@ export function startOf(
     case 'sun-azimuth':
       return { kind, event: 'sunrise', azimuthDeg: DUE_EAST_DEG, pointName: '' };
   }
+}
+
+/** The side on which the star is highest here by the place's own list; for one that is not in it, that of most stars. */
+function facingOf(markerKey: string, offered: readonly Pick<SkyMarkerYear, 'spec'>[]): Facing {
+  const known = offered.map(({ spec }) => spec).filter((spec) => spec.kind === 'due-meridian');
+  const own = known.find((spec) => spec.markerKey === markerKey);
+  if (own) return own.facing;
+  const northern = known.filter(({ facing }) => facing === 'north').length;
+  return northern > known.length - northern ? 'north' : 'south';
 }
 
 /** Offered signs whose name holds what was typed; those that the calendar goes by come first. */

@@ -13,6 +13,15 @@ describe('a sign that one sets up oneself', () => {
     const north = { kind: 'due-meridian', markerKey: 'hr2491', facing: 'north', solarHour: 21 } as const;
     expect(startOf('due-meridian', 'pleiades', [{ spec: north }])).toMatchObject({ facing: 'north' });
   });
+
+  it('faces the star’s own side where the place’s list has it, else that of most stars', () => {
+    const due = (markerKey: string, facing: 'south' | 'north') => ({
+      spec: { kind: 'due-meridian', markerKey, facing, solarHour: 21 } as const,
+    });
+    const offered = [due('hr1708', 'north'), due('hr2491', 'south'), due('hr2061', 'south')];
+    expect(startOf('due-meridian', 'hr1708', offered)).toMatchObject({ facing: 'north' });
+    expect(startOf('due-meridian', 'pleiades', offered)).toMatchObject({ facing: 'south' });
+  });
 });
 
 describe('the signs that are found', () => {
