@@ -128,7 +128,7 @@ export const texts = {
     addFirst: 'Add the first entry',
     empty: 'No entries yet',
     emptyHint:
-      'An entry ties one piece of work or one rite to a star. Start with the work that everybody waits for.',
+      'An entry ties one piece of work or one rite to a sign of the sky. Start with the work that everybody waits for.',
     emptyReader: 'The officer has not put in any entries yet.',
     chooseOne: 'Choose an entry in the list.',
     trouble: 'The entries could not be brought up',

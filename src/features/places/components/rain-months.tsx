@@ -38,7 +38,8 @@ export function RainMonths({ rainMonths, onChange }: RainMonthsProps) {
                 onChange(rainMonths.map((each, at) => (at === index ? !each : each)));
               }}
             >
-              {isWet && <SignIcon sign="rain" size={26} />}
+              {/* As tall with a cloud as without. */}
+              <span className="h-[26px]">{isWet && <SignIcon sign="rain" size={26} />}</span>
               <span>{month.short}</span>
             </button>
           </li>

@@ -80,6 +80,25 @@ describe('the form of a place', () => {
     expect(puts(log)).toMatchObject([{ latitudeDeg: -12.5, elevationM: 2010, version: 3 }]);
   });
 
+  it('takes the months of rain and cloud as switches, and moves no date by them', async () => {
+    const log = answerWith(server({ place: TAZIMEL }));
+    const { user } = await open();
+    const board = (await screen.findByRole('heading', { name: 'Months of rain and cloud' })).closest(
+      'section',
+    );
+    const month = (name: string) => within(board as HTMLElement).getByRole('button', { name });
+    expect(month('July').getAttribute('aria-pressed')).toBe('true');
+    await user.click(month('July'));
+    await user.click(month('October'));
+    await user.click(save());
+    await screen.findByText(/is saved/);
+    const wet = [5, 7, 8, 9];
+    expect(puts(log)).toMatchObject([
+      { rainMonths: Array.from({ length: 12 }, (_, index) => wet.includes(index)) },
+    ]);
+    expect(skylineEffects(2027, { ...TAZIMEL, rainMonths: [] })).toEqual(skylineEffects(2027, TAZIMEL));
+  });
+
   it('says what to change, keeps what was typed and goes to the field', async () => {
     const log = answerWith(server({ place: TAZIMEL }));
     const { user } = await open();
