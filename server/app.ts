@@ -50,6 +50,10 @@ import { DevicesService } from './features/session/devices.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
+import { erasersOf } from './features/withdrawals/erasers.service.js';
+import { WithdrawalsService } from './features/withdrawals/withdrawals.service.js';
+import { withdrawalsRoutes } from './features/withdrawals/withdrawals.routes.js';
+import type { WithdrawalList } from './storage/withdrawal-list.js';
 import { GroupsService } from './features/sharing/groups.service.js';
 import { ItemSharingService } from './features/sharing/item-sharing.service.js';
 import { sharingRoutes } from './features/sharing/sharing.routes.js';
@@ -93,6 +97,8 @@ export interface AppOptions extends AppContext {
   inbox?: DevInbox | null;
   /** Keeps what people record and photograph. */
   storage: FileStore;
+  /** What was taken back, kept beside the database. */
+  withdrawals: WithdrawalList;
   /** Looks at every file before it is kept; null where there is no scanner. */
   scan?: FileScan | null;
   productVersion: string;
@@ -182,13 +188,10 @@ export function createApp(options: AppOptions): App {
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const answers = new AnswersService(dataSource, clock);
   reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
+  const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
   attachmentsRoutes(
     mount,
-    new AttachmentsService(
-      dataSource,
-      clock,
-      new AttachmentFilesService(options.storage, options.scan ?? null),
-    ),
+    new AttachmentsService(dataSource, clock, attachmentFiles),
     new AttachmentReadingService(dataSource, clock, options.storage),
     new AttachmentWordsService(dataSource, clock),
   );
@@ -200,6 +203,8 @@ export function createApp(options: AppOptions): App {
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
+  const erasers = erasersOf(attachmentFiles, clock);
+  withdrawalsRoutes(mount, new WithdrawalsService(dataSource, clock, erasers, options.withdrawals));
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
   auditRoutes(mount, new AuditListService(dataSource, clock));
 

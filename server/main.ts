@@ -15,6 +15,10 @@ import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
 import type { DevInbox } from './mail/inbox.js';
 import { createSmtpMailer } from './mail/smtp-mailer.js';
+import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
+import { erasersOf } from './features/withdrawals/erasers.service.js';
+import { replayWithdrawals } from './features/withdrawals/replay.service.js';
+import { WithdrawalFile } from './storage/withdrawal-list.js';
 import { commandScan } from './storage/file-scan.js';
 import { LocalFileStore } from './storage/local-file-store.js';
 
@@ -36,6 +40,10 @@ async function main(): Promise<void> {
     await migrate(dataSource);
     await prepareAccounts(dataSource, config, clock);
     const storage = await openStorage(dataSource, config, log);
+    const withdrawals = new WithdrawalFile(path.join(config.dataDir, 'withdrawals', 'list.jsonl'));
+    const erasers = erasersOf(new AttachmentFilesService(storage, null), clock);
+    const vanished = await replayWithdrawals(dataSource, erasers, withdrawals);
+    if (vanished > 0) log.warn({ vanished }, 'things that were taken back had come back and are gone again');
     const inbox = await openInbox(config);
     const smtpUrl = inbox?.smtpUrl ?? config.mail.smtpUrl;
     const mailer = smtpUrl === null ? null : createSmtpMailer({ url: smtpUrl, from: config.mail.from });
@@ -47,6 +55,7 @@ async function main(): Promise<void> {
       clock,
       log,
       storage,
+      withdrawals,
       scan: config.scanCommand === null ? null : commandScan(config.scanCommand),
       productVersion: productVersion(),
       clientDir: clientDir(),

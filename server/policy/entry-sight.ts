@@ -33,7 +33,7 @@ export async function entrySight(
         .map((shared) => appearance(viewer, shared))
         .reduce(narrower),
     isForVillage: (thing) => both(thing).every((shared) => isForVillage(shared, viewer.today)),
-    isKept: (thing) => both(thing).some((shared) => shared === undefined || isKept(shared)),
+    isKept: (thing) => both(thing).some(standsApart),
     sharedOf,
   };
 }
@@ -44,8 +44,13 @@ export async function keptEntryIds(
   things: readonly SeenThing[],
 ): Promise<Set<string>> {
   const { both } = await sharedOfThings(manager, things);
-  const kept = things.filter((thing) => both(thing).some((shared) => shared === undefined || isKept(shared)));
+  const kept = things.filter((thing) => both(thing).some(standsApart));
   return new Set(kept.map(({ entryId }) => entryId));
+}
+
+/** Not the village's to answer: kept by its people, paused, or nothing is known about it. */
+function standsApart(shared: Shared | undefined): boolean {
+  return shared?.state !== 'shared' || isKept(shared);
 }
 
 async function sharedOfThings(manager: EntityManager, things: readonly SeenThing[]) {
@@ -63,7 +68,10 @@ async function sharedOfThings(manager: EntityManager, things: readonly SeenThing
     /** The thing itself and, where it goes by one, the village's figure. */
     both: ({ entryId, markerKey }: SeenThing): (Shared | undefined)[] => {
       const figureId = figureIdOf(markerKey);
-      return [entries.get(entryId), ...(figureId === null ? [] : [figures.get(figureId)])];
+      const figure = figureId === null ? undefined : figures.get(figureId);
+      // Of a figure that was withdrawn nothing is left that could tell: its entries go by a star's own name.
+      const counts = figureId !== null && figure?.state !== 'withdrawn';
+      return [entries.get(entryId), ...(counts ? [figure] : [])];
     },
     sharedOf: (entryId: string) => entries.get(entryId),
   };

@@ -19,6 +19,7 @@ import { sheetsEndpoints } from './sheets.js';
 import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
 import { todayEndpoints } from './today.js';
+import { withdrawalsEndpoints } from './withdrawals.js';
 import { versionsEndpoints } from './versions.js';
 
 /** Every operation of the API. The server mounts exactly these; OpenAPI and the permission table list them. */
@@ -41,6 +42,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   attachmentsEndpoints,
   sheetsEndpoints,
   sharingEndpoints,
+  withdrawalsEndpoints,
   auditEndpoints,
   todayEndpoints,
   lookEndpoints,

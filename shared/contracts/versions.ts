@@ -54,6 +54,8 @@ export const versionEntry = versionEntryBody.extend({
   hash: z.string(),
   /** Its place in the order, with gaps of random width; null in versions of the first scheme. */
   rank: z.number().int().nullable(),
+  /** True where its giver's name was taken off since: its hash cannot be made again. */
+  redacted: z.boolean(),
 });
 export type VersionEntry = z.infer<typeof versionEntry>;
 

@@ -1,10 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
-import { ENDPOINTS } from '#shared/contracts/index.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { furnishLevels, type LevelledVillage, type Planted } from '#tests/support/levelled-village.js';
-import { readPdfText } from '#tests/support/pdf/read-text.js';
+import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 
 /**
  * Marker words stand in things of every level. Every endpoint of the contracts that reads is asked by everybody for
@@ -32,14 +30,12 @@ beforeAll(async () => {
 }, 120_000);
 afterAll(() => api.close());
 
-const READING = ENDPOINTS.filter(({ method }) => method === 'GET');
-
 describe('what every endpoint says to everybody', () => {
   it.each(READING.map((endpoint) => [`${endpoint.method} ${endpoint.path}`, endpoint] as const))(
     '%s holds no word that is not for who asks',
     async (_, endpoint) => {
       for (const [name, client] of Object.entries(people)) {
-        for (const path of pathsOf(endpoint)) {
+        for (const path of pathsOf(endpoint, village)) {
           const text = await textOf(client, path, endpoint);
           const leaked = village.planted.filter(
             ({ word, for: seers }) => text.includes(word) && !seers.has(name),
@@ -54,7 +50,7 @@ describe('what every endpoint says to everybody', () => {
     for (const [name, client] of Object.entries(people)) {
       const seen = new Set<string>();
       for (const endpoint of READING.filter(({ id }) => SHOWING.has(id))) {
-        for (const path of pathsOf(endpoint)) {
+        for (const path of pathsOf(endpoint, village)) {
           const text = await textOf(client, path, endpoint);
           for (const { word } of village.planted) if (text.includes(word)) seen.add(word);
         }
@@ -140,38 +136,4 @@ function plantedIn(where: string): Planted {
   const found = village.planted.find((one) => one.where === where);
   if (!found) throw new Error(`Nothing is planted in ${where}`);
   return found;
-}
-
-async function textOf(
-  client: Client,
-  path: string,
-  { fileType }: Pick<Endpoint, 'fileType'>,
-): Promise<string> {
-  if (fileType !== 'application/pdf') return (await client.get(path)).text;
-  const answer = await client
-    .get(path)
-    .buffer(true)
-    .parse((response, done) => {
-      const parts: Buffer[] = [];
-      response.on('data', (part: Buffer) => parts.push(part));
-      response.on('end', () => {
-        done(null, Buffer.concat(parts));
-      });
-    });
-  const file = answer.body as Buffer;
-  return file.subarray(0, 5).toString() === '%PDF-' ? readPdfText(file) : file.toString();
-}
-
-/** Every path of the endpoint that names something of the village. */
-function pathsOf(endpoint: Endpoint): string[] {
-  const values: Record<string, readonly string[]> = village.params;
-  const names = [...endpoint.path.matchAll(/:([A-Za-z]+)/gu)].map(([, name = '']) => name);
-  let filled: Record<string, string>[] = [{}];
-  for (const name of names) {
-    const list = values[name];
-    if (!list) throw new Error(`Say in levelled-village.ts what stands for :${name} of ${endpoint.id}.`);
-    filled = filled.flatMap((params) => list.map((value) => ({ ...params, [name]: value })));
-  }
-  const queries = village.queries[endpoint.id] ?? [''];
-  return filled.flatMap((params) => queries.map((query) => fillPath(endpoint.path, params) + query));
 }

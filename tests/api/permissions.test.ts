@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { WithdrawalEntity } from '#server/db/entities/withdrawal.entity.js';
 import { VillageGroupEntity } from '#server/db/entities/village-group.entity.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { addGroup } from '#tests/support/sharing-api.js';
@@ -42,6 +43,7 @@ interface Village {
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
   groupId: string;
+  withdrawalId: string;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
   publishedNumber: number;
@@ -148,6 +150,7 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     attachmentId: village.attachmentId,
     part: '1',
     groupId: village.groupId,
+    withdrawalId: village.withdrawalId,
     itemType: 'entry',
     itemId: village.entryId,
     markerKey: 'pleiades',
@@ -231,6 +234,9 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     updateEntry: () => ({ content: entryInput(), ...stale }),
     addGroup: () => ({ name: `Menders ${role ?? ''}`, memberIds: [village.elderId] }),
     updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
+    // Nobody of these gave it or is asked for it: the thing stays.
+    withdrawItem: () => ({ leavesTrace: true, askedById: village.place.id }),
+    pauseItem: () => ({ askedById: village.place.id }),
     changeSharing: () => ({ sharing: { level: 'village', ...PLAIN_DETAILS }, ...stale }),
     reorderEntries: () => ({ entryIds: [village.entryId] }),
     askChanges: () => ({ reason: 'taken-back', note: '' }),
@@ -264,6 +270,7 @@ async function furnishOwn(): Promise<Village> {
     personId: added.person.id,
     figureId,
     attachmentId: (await addPicture(village.elder, figureId)).id,
+    withdrawalId: await aWithdrawal(village.officer.communityId),
     groupId: (await addGroup(village.steward, 'Weavers', [village.elder])).id,
     elderId: village.elder.personId,
     publishedNumber: published.number,
@@ -286,11 +293,22 @@ async function furnishOther(): Promise<Village> {
     personId: officer.personId,
     figureId,
     attachmentId: (await addPicture(officer, figureId)).id,
+    withdrawalId: await aWithdrawal(home.community.id),
     groupId: await firstGroup(home.community.id),
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,
   };
+}
+
+/** Of something that is on no sheet. */
+async function aWithdrawal(communityId: string): Promise<string> {
+  const id = randomUUID();
+  await api.dataSource.getRepository(WithdrawalEntity).insert({
+    ...{ id, communityId, itemType: 'entry', itemId: randomUUID(), at: api.clock.now() },
+    ...{ askedBy: null, doneBy: null, published: [], sheetsReplacedAt: null },
+  });
+  return id;
 }
 
 /** Groups are founded by stewards and elders, who cannot sign in there. */

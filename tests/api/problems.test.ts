@@ -171,6 +171,7 @@ describe('while the database cannot be reached', () => {
       productVersion: 'test',
       clientDir: null,
       storage: api.storage,
+      withdrawals: api.withdrawals,
       mailer: null,
     });
     const agent = request.agent(express);

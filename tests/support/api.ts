@@ -11,6 +11,7 @@ import { DEMO_DOMAIN, DEMO_PASSWORD } from '#server/features/demo/demo-villages.
 import { seedDemoVillages } from '#server/features/demo/demo.service.js';
 import type { Mailer } from '#server/mail/mailer.js';
 import type { FileScan } from '#server/storage/file-scan.js';
+import { WithdrawalFile } from '#server/storage/withdrawal-list.js';
 import { LocalFileStore } from '#server/storage/local-file-store.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { emptyTestDatabase, openTestDatabase } from './database.js';
@@ -23,6 +24,7 @@ export interface TestApi {
   app: App;
   /** Where attachments are kept; a folder that is gone after `close`. */
   storage: LocalFileStore;
+  withdrawals: WithdrawalFile;
   dataDir: string;
   clock: { now(): Date; set(now: Date): void };
   /** A new browser without a sign-in. */
@@ -68,6 +70,7 @@ export async function openTestApi({
   };
   const dataDir = mkdtempSync(path.join(os.tmpdir(), 'dawnpeg-test-files-'));
   const storage = new LocalFileStore(path.join(dataDir, 'attachments'));
+  const withdrawals = new WithdrawalFile(path.join(dataDir, 'withdrawals', 'list.jsonl'));
   const config = parseConfig({
     NODE_ENV: 'test',
     DATA_DIR: dataDir,
@@ -79,6 +82,7 @@ export async function openTestApi({
       dataSource,
       mailer,
       storage,
+      withdrawals,
       scan,
       clock,
       config,
@@ -89,6 +93,7 @@ export async function openTestApi({
   const api: TestApi = {
     dataSource,
     storage,
+    withdrawals,
     dataDir,
     app: build(),
     clock,

@@ -174,6 +174,7 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       itemId: [...kept, ...Object.values(figures)].map(({ id }) => id),
       groupId: [group.id],
       attachmentId: [randomUUID()],
+      withdrawalId: [randomUUID()],
       part: ['0', '1'],
       personId: [elder.personId],
       deviceId: ['0'.repeat(64)],

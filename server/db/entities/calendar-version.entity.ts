@@ -63,6 +63,10 @@ export class CalendarVersionEntity {
   @Column({ name: 'withdrawn_traces', type: 'int', default: 0 })
   withdrawnTraces!: number;
 
+  /** True where a name was taken out of the header: its own hash cannot be made again, the version's can. */
+  @Column({ name: 'header_redacted', type: 'boolean', default: false })
+  headerRedacted!: boolean;
+
   /** As it stood when the draft was submitted: who has to sign does not change in the middle of a review. */
   @Column({ name: 'sign_off_rule', type: 'json' })
   signOffRule!: SignOffRule;

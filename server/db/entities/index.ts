@@ -21,6 +21,7 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
+import { WithdrawalEntity } from './withdrawal.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
 
 /** Named one by one: a glob would miss a file quietly, and breaks in a build. */
@@ -49,4 +50,5 @@ export const ENTITIES = [
   GroupMemberEntity,
   ItemSharingEntity,
   KeptReadEntity,
+  WithdrawalEntity,
 ];

@@ -27,6 +27,10 @@ export class VersionEntryEntity {
   @Column({ type: 'boolean', default: true })
   stands!: boolean;
 
+  /** True where its giver's name was taken off: its own hash cannot be made again, the version's can. */
+  @Column({ type: 'boolean', default: false })
+  redacted!: boolean;
+
   @Index('version_entry_entry')
   @Column({ name: 'entry_id', type: 'uuid' })
   entryId!: string;

@@ -4,6 +4,7 @@ import { Figures1796400000000 } from './1796400000000-figures.js';
 import { Sharing1796600000000 } from './1796600000000-sharing.js';
 import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 import { Attachments1797200000000 } from './1797200000000-attachments.js';
+import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -13,4 +14,5 @@ export const MIGRATIONS = [
   Sharing1796600000000,
   RainMonths1797000000000,
   Attachments1797200000000,
+  Withdrawals1797800000000,
 ];

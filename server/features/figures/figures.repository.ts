@@ -24,10 +24,19 @@ export async function entriesThatGoBy(
   communityId: string,
   markerKey: string,
 ): Promise<EntryEntity[]> {
+  const entries = await draftEntriesThatGoBy(manager, communityId, markerKey);
+  return entries.filter(({ deletedAt }) => deletedAt === null);
+}
+
+/** The same with those that were taken out. */
+export async function draftEntriesThatGoBy(
+  manager: EntityManager,
+  communityId: string,
+  markerKey: string,
+): Promise<EntryEntity[]> {
   return manager.find(EntryEntity, {
     where: {
       calendar: { communityId },
-      deletedAt: IsNull(),
       content: Raw(
         (column) =>
           `:markerKey IN (JSON_VALUE(${column}, '$.lead.markerKey'), JSON_VALUE(${column}, '$.lead.spec.markerKey'))`,

@@ -134,9 +134,9 @@ export async function frozenContent(
   version: CalendarVersionEntity,
 ): Promise<{ header: VersionHeader; entries: VersionEntry[]; leaves: string[] }> {
   const rows = await frozenEntries(manager, version.id);
-  const { headerText, headerHash, hash, leaves } = version;
+  const { headerText, headerHash, headerRedacted, hash, leaves } = version;
   const scheme = version.scheme === 1 ? 1 : 2;
-  const sealed = { scheme, headerText, headerHash, hash, leaves, entries: rows } as const;
+  const sealed = { scheme, headerText, headerHash, headerRedacted, hash, leaves, entries: rows } as const;
   checkSeal(sealed);
   return { header: toHeader(version), entries: rows.map(toVersionEntry), leaves: leavesOf(sealed) };
 }

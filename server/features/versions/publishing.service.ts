@@ -53,6 +53,7 @@ export class PublishingService {
         scheme: sealed.scheme,
         leaves: sealed.leaves,
         withdrawnTraces: 0,
+        headerRedacted: false,
         signOffRule: community.signOffRule,
         writerIds: await draftWriterIds(manager, calendarId),
         submittedBy: actor.person.id,

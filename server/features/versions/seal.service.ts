@@ -21,6 +21,8 @@ export interface SealedEntry extends EntrySeal {
   bodyText: string;
   /** Null in versions of scheme 1. */
   rank: number | null;
+  /** True where something was taken off it since. */
+  redacted?: boolean;
 }
 
 export interface SealedVersion {
@@ -28,6 +30,8 @@ export interface SealedVersion {
   headerText: string;
   headerHash: string;
   hash: string;
+  /** True where something was taken out of it since. */
+  headerRedacted?: boolean;
   /** Null in a version of scheme 1 that is still whole. */
   leaves: string[] | null;
   entries: SealedEntry[];
@@ -92,11 +96,12 @@ export function checkSeal(version: SealedVersion): void {
   const known = new Set(leaves);
   const ranks = version.entries.map(({ rank }) => rank ?? 0);
   const intact =
-    sha256(headerText) === headerHash &&
+    (version.headerRedacted === true || sha256(headerText) === headerHash) &&
     ranks.every((rank, index) => scheme === 1 || rank > (ranks[index - 1] ?? 0)) &&
     version.entries.every(
       (entry) =>
-        sha256(entryHashText(entry.salt, entry.bodyText)) === entry.hash && known.has(leafOf(scheme, entry)),
+        (entry.redacted === true || sha256(entryHashText(entry.salt, entry.bodyText)) === entry.hash) &&
+        known.has(leafOf(scheme, entry)),
     ) &&
     sha256(versionHashText(scheme, headerHash, leaves)) === hash;
   if (!intact) throw new BrokenSealError('A stored version does not match its hash.');

@@ -16,7 +16,16 @@ export function toHeader(row: CalendarVersionEntity): VersionHeader {
 
 export function toVersionEntry(row: VersionEntryEntity): VersionEntry {
   const { entryId, content, dates } = JSON.parse(row.bodyText) as VersionEntryBody;
-  return { entryId, content, dates, position: row.position, salt: row.salt, hash: row.hash, rank: row.rank };
+  return {
+    entryId,
+    content,
+    dates,
+    position: row.position,
+    salt: row.salt,
+    hash: row.hash,
+    rank: row.rank,
+    redacted: row.redacted,
+  };
 }
 
 export function toSummary(

@@ -81,7 +81,7 @@ export class VersionsService {
       stateNote: row.stateNote,
       header,
       headerHash: row.headerHash,
-      headerComplete,
+      headerComplete: headerComplete && !row.headerRedacted,
       scheme: row.scheme === 1 ? 1 : 2,
       leaves: frozen.leaves,
       keptCount,

@@ -1,0 +1,34 @@
+import { In, type EntityManager } from 'typeorm';
+import { AttachmentPartEntity } from '../../db/entities/attachment-part.entity.js';
+import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
+import type { AttachmentSubjectType } from '#shared/contracts/attachments.js';
+
+/** Where the bytes of a removed attachment are kept, for whoever takes them away afterwards. */
+export interface ErasedFiles {
+  attachmentIds: string[];
+  files: AttachmentPartEntity[];
+}
+
+/** Takes recordings and pictures of things out of the tables, with their written-out words. */
+export async function eraseAttachmentsOf(
+  manager: EntityManager,
+  subjectType: AttachmentSubjectType,
+  subjectIds: readonly string[],
+): Promise<ErasedFiles> {
+  if (subjectIds.length === 0) return { attachmentIds: [], files: [] };
+  const rows = await manager.findBy(AttachmentEntity, { subjectType, subjectId: In([...subjectIds]) });
+  return eraseAttachments(
+    manager,
+    rows.map(({ id }) => id),
+  );
+}
+
+export async function eraseAttachments(
+  manager: EntityManager,
+  attachmentIds: string[],
+): Promise<ErasedFiles> {
+  if (attachmentIds.length === 0) return { attachmentIds, files: [] };
+  const files = await manager.findBy(AttachmentPartEntity, { attachmentId: In(attachmentIds) });
+  await manager.delete(AttachmentEntity, { id: In(attachmentIds) });
+  return { attachmentIds, files };
+}

@@ -1,0 +1,82 @@
+import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
+import { wasPublished } from '#shared/calendar/version-state.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
+import type { EntityManager } from 'typeorm';
+import { AnswerEntity } from '../../db/entities/answer.entity.js';
+import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import type { PublishedTrace } from '../../db/entities/withdrawal.entity.js';
+import { markerNamesOf } from '../stars/marker-names.service.js';
+import { frozenEntries } from './versions.repository.js';
+
+/**
+ * Takes an entry out of every version that froze it, with what elders said about it. Its leaf stays, so the hash of
+ * the version still holds for the rest.
+ */
+export async function eraseFrozenEntry(
+  manager: EntityManager,
+  entryId: string,
+  leavesTrace: boolean,
+): Promise<PublishedTrace[]> {
+  const rows = await manager.find(VersionEntryEntity, {
+    where: { entryId },
+    relations: { calendarVersion: true },
+  });
+  for (const { id, versionId, calendarVersion: version } of rows) {
+    const leaves = version.leaves ?? (await frozenEntries(manager, versionId)).map(({ hash }) => hash);
+    await manager.update(
+      CalendarVersionEntity,
+      { id: versionId },
+      { leaves, withdrawnTraces: version.withdrawnTraces + (leavesTrace ? 1 : 0) },
+    );
+    version.leaves = leaves;
+    await manager.delete(VersionEntryEntity, { id });
+  }
+  await manager.delete(AnswerEntity, { entryId });
+  return rows
+    .map(({ calendarVersion }) => calendarVersion)
+    .filter(({ state }) => wasPublished(state))
+    .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
+}
+
+/** Takes the giver's name off an entry wherever it was frozen; that entry's own hash cannot be made again then. */
+export async function takeNameOffFrozen(manager: EntityManager, entryId: string): Promise<void> {
+  for (const { id, bodyText } of await manager.findBy(VersionEntryEntity, { entryId })) {
+    const body = JSON.parse(bodyText) as VersionEntryBody;
+    const { giverId: _giver, ...content } = body.content;
+    const nameless = canonicalJson({ ...body, content: { ...content, giver: '' } });
+    if (nameless !== bodyText) {
+      await manager.update(VersionEntryEntity, { id }, { bodyText: nameless, redacted: true });
+    }
+  }
+}
+
+/** Takes a figure's own name out of every frozen header: what went by it goes by its star's name in the sky. */
+export async function eraseFrozenFigure(
+  manager: EntityManager,
+  communityId: string,
+  markerKey: string,
+): Promise<PublishedTrace[]> {
+  const versions = await manager.find(CalendarVersionEntity, { where: { calendar: { communityId } } });
+  const found = versions.filter(({ headerText }) => headerText.includes(markerKey));
+  for (const { id, headerText } of found) {
+    const header = JSON.parse(headerText) as VersionHeader;
+    const nameless = canonicalJson(withoutName(header, markerKey));
+    await manager.update(CalendarVersionEntity, { id }, { headerText: nameless, headerRedacted: true });
+  }
+  return found
+    .filter(({ state }) => wasPublished(state))
+    .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
+}
+
+function withoutName(header: VersionHeader, markerKey: string): VersionHeader {
+  const figures = header.place.figures?.map((figure) =>
+    figure.key === markerKey ? { ...figure, name: '' } : figure,
+  );
+  const markers = header.markers.map((marker) => {
+    if (marker.markerKey !== markerKey) return marker;
+    const star = marker.hr === null ? null : markerNamesOf(`hr${marker.hr}`, []);
+    return { ...marker, name: star?.name ?? '', designation: star?.designation ?? '' };
+  });
+  return { ...header, markers, place: { ...header.place, ...(figures ? { figures } : {}) } };
+}

@@ -1,0 +1,62 @@
+import type { SharedItemType } from '#shared/contracts/sharing.js';
+import type { EntityManager } from 'typeorm';
+import { AnswerEntity } from '../../db/entities/answer.entity.js';
+import { KeptReadEntity } from '../../db/entities/kept-read.entity.js';
+import type { Clock } from '../../http/context.js';
+import {
+  eraseAttachments,
+  eraseAttachmentsOf,
+  type ErasedFiles,
+} from '../attachments/attachment-eraser.service.js';
+import type { AttachmentFilesService } from '../attachments/attachment-files.service.js';
+import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.service.js';
+import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
+import { eraseFrozenEntry, eraseFrozenFigure } from '../versions/frozen-eraser.service.js';
+import type { Erased, Eraser } from './eraser.service.js';
+
+/** The erasers of the parts that there are. A new part that keeps what people gave adds its own. */
+export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[] {
+  const attached = (erased: ErasedFiles): Erased => ({
+    withIt: erased.attachmentIds.map((itemId) => ({ itemType: 'attachment' as const, itemId })),
+    afterwards: () => files.remove(erased.files),
+  });
+  return [
+    only('entry', async (manager, { itemId, leavesTrace }) => {
+      const answers = await manager.findBy(AnswerEntity, { entryId: itemId });
+      const spoken = await eraseAttachmentsOf(
+        manager,
+        'answer',
+        answers.map(({ id }) => id),
+      );
+      const published = await eraseFrozenEntry(manager, itemId, leavesTrace);
+      await eraseDraftEntry(manager, itemId);
+      return { ...attached(spoken), published };
+    }),
+    async (manager, { itemType, itemId }) =>
+      itemType === 'entry' || itemType === 'figure'
+        ? attached(await eraseAttachmentsOf(manager, itemType, [itemId]))
+        : {},
+    only('figure', async (manager, { communityId, itemId }) => {
+      const { markerKey, indicatorHr, entries } = await eraseFigureRow(manager, communityId, itemId);
+      await leadByStarInstead(manager, entries, indicatorHr, clock.now());
+      const told = await eraseAttachmentsOf(manager, 'marker', [markerKey]);
+      const published = await eraseFrozenFigure(manager, communityId, markerKey);
+      const { withIt = [], ...rest } = attached(told);
+      return { ...rest, published, withIt: [...withIt, { itemType: 'story', itemId }] };
+    }),
+    only('story', async (manager, { itemId }) => {
+      await eraseStory(manager, itemId);
+      return {};
+    }),
+    only('attachment', async (manager, { itemId }) => attached(await eraseAttachments(manager, [itemId]))),
+    async (manager, { itemId }) => {
+      await manager.delete(KeptReadEntity, { itemId });
+      return {};
+    },
+  ];
+}
+
+function only(itemType: SharedItemType, erase: Eraser): Eraser {
+  return (manager: EntityManager, erasing) =>
+    erasing.itemType === itemType ? erase(manager, erasing) : Promise.resolve({});
+}

@@ -1,0 +1,246 @@
+import type { SharedItemType } from '#shared/contracts/sharing.js';
+import {
+  PAUSE_DAYS,
+  WITHDRAWN_LISTED_DAYS,
+  type ItemState,
+  type SheetToReplace,
+  type WithdrawalInput,
+  type WithdrawnItem,
+} from '#shared/contracts/withdrawals.js';
+import { addDays, subDays } from 'date-fns';
+import { randomUUID } from 'node:crypto';
+import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
+import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
+import { MembershipEntity } from '../../db/entities/membership.entity.js';
+import { WithdrawalEntity } from '../../db/entities/withdrawal.entity.js';
+import { inTransaction } from '../../db/in-transaction.js';
+import { hasRole, type Actor } from '../../http/actor.js';
+import { conflict, invalidField, notFound } from '../../http/app-error.js';
+import type { Clock } from '../../http/context.js';
+import { appearance, isKept, maySee } from '../../policy/policy.js';
+import { lockSharing } from '../../policy/sharing.repository.js';
+import { viewerOf } from '../../policy/viewer.js';
+import type { WithdrawalList } from '../../storage/withdrawal-list.js';
+import { recordAudit } from '../audit/audit.service.js';
+import { takeNameOffDraft } from '../calendars/entry-eraser.service.js';
+import { takeNamesOffTellings } from '../figures/figure-eraser.service.js';
+import { takeNameOffFrozen } from '../versions/frozen-eraser.service.js';
+import type { Eraser } from './eraser.service.js';
+import { vanish } from './vanishing.service.js';
+
+type Action = 'item-withdrawn' | 'item-paused' | 'item-resumed' | 'name-taken-off';
+
+/** Taking back what was given: at once, everywhere, by whatever way and through whoever is asked. */
+export class WithdrawalsService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+    private readonly erasers: readonly Eraser[],
+    private readonly list: WithdrawalList,
+  ) {}
+
+  async withdraw(
+    actor: Actor,
+    itemType: SharedItemType,
+    itemId: string,
+    { leavesTrace, askedById }: WithdrawalInput,
+  ): Promise<void> {
+    const at = this.clock.now();
+    const { communityId } = actor;
+    const vanished = await inTransaction(this.dataSource, async (manager) => {
+      const row = await this.own(manager, actor, itemType, itemId);
+      if (row.state === 'withdrawn') return null;
+      await expectOfVillage(manager, actor, askedById);
+      await this.record(manager, actor, row, 'item-withdrawn', askedById);
+      const gone = await vanish(manager, this.erasers, { itemType, itemId, communityId, leavesTrace, at });
+      // What its people keep was on no sheet.
+      const published = isKept(row) ? [] : gone.published;
+      await manager.insert(WithdrawalEntity, {
+        id: randomUUID(),
+        ...{ communityId, itemType, itemId, at, published },
+        askedBy: askedById ?? actor.person.id,
+        doneBy: actor.person.id,
+        sheetsReplacedAt: published.length === 0 ? at : null,
+      });
+      return gone;
+    });
+    if (vanished === null) return;
+    await this.list.add({ itemType, itemId, communityId, leavesTrace, at: at.toISOString() });
+    for (const finish of vanished.afterwards) await finish();
+  }
+
+  async pause(
+    actor: Actor,
+    itemType: SharedItemType,
+    itemId: string,
+    askedById: string | null,
+  ): Promise<void> {
+    await inTransaction(this.dataSource, async (manager) => {
+      const row = await this.own(manager, actor, itemType, itemId);
+      if (row.state !== 'shared') return;
+      await expectOfVillage(manager, actor, askedById);
+      await this.setState(manager, row, 'paused');
+      await this.record(manager, actor, row, 'item-paused', askedById);
+    });
+  }
+
+  async resume(actor: Actor, itemType: SharedItemType, itemId: string): Promise<void> {
+    await inTransaction(this.dataSource, async (manager) => {
+      const row = await this.own(manager, actor, itemType, itemId);
+      if (row.state !== 'paused') throw conflict('not-paused');
+      if (!mayResume(actor, row, this.clock.now())) throw conflict('pause-over');
+      await this.setState(manager, row, 'shared');
+      await this.record(manager, actor, row, 'item-resumed', null);
+    });
+  }
+
+  /** In the draft, in every version and beside every telling; who may see the thing and to whom it belongs stays. */
+  async takeNameOff(actor: Actor, itemType: SharedItemType, itemId: string): Promise<void> {
+    await inTransaction(this.dataSource, async (manager) => {
+      const row = await this.own(manager, actor, itemType, itemId);
+      if (row.state === 'withdrawn') throw notFound();
+      if (itemType === 'entry') {
+        await takeNameOffDraft(manager, itemId);
+        await takeNameOffFrozen(manager, itemId);
+      } else if (itemType === 'figure' || itemType === 'story') await takeNamesOffTellings(manager, itemId);
+      const details = { ...row.details, naming: 'not-named' as const };
+      await manager.update(ItemSharingEntity, { itemType, itemId }, { details });
+      await this.record(manager, actor, row, 'name-taken-off', null);
+    });
+  }
+
+  async readState(actor: Actor, itemType: SharedItemType, itemId: string): Promise<ItemState> {
+    const { manager } = this.dataSource;
+    const row = await manager.findOneBy(ItemSharingEntity, { itemType, itemId });
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const known = row !== null && row.communityId === actor.communityId && row.state !== 'withdrawn';
+    if (!known) throw notFound();
+    const mine = await this.mayTakeBack(manager, actor, row);
+    if (!mine && !maySee(viewer, row)) throw notFound();
+    const shared = row.state === 'shared';
+    return {
+      state: shared ? 'shared' : 'paused',
+      pausedAt: shared ? null : (row.stateAt?.toISOString() ?? null),
+      may: {
+        withdraw: mine,
+        pause: mine && shared,
+        resume: mine && !shared && mayResume(actor, row, this.clock.now()),
+        takeNameOff: mine && row.details.naming !== 'not-named',
+      },
+    };
+  }
+
+  /** What this person could see while it was shared, or what is theirs; newest first. */
+  async listGone(actor: Actor): Promise<WithdrawnItem[]> {
+    const { manager } = this.dataSource;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const rows = await manager.find(ItemSharingEntity, {
+      where: {
+        communityId: actor.communityId,
+        state: In(['withdrawn', 'paused']),
+        stateAt: MoreThan(subDays(this.clock.now(), WITHDRAWN_LISTED_DAYS)),
+      },
+      order: { stateAt: 'DESC', itemId: 'ASC' },
+    });
+    return rows
+      .filter((row) => appearance(viewer, { ...row, state: 'shared' }) === 'full')
+      .map(({ itemType, itemId, stateAt }) => ({ itemType, itemId, at: stateAt?.toISOString() ?? '' }));
+  }
+
+  /** A sheet is named only by its version, so whoever prints learns that something changed and not what. */
+  async listSheets(actor: Actor): Promise<SheetToReplace[]> {
+    const { manager } = this.dataSource;
+    const rows = await manager.find(WithdrawalEntity, {
+      where: { communityId: actor.communityId, sheetsReplacedAt: IsNull() },
+      order: { at: 'ASC', id: 'ASC' },
+    });
+    const calendars = await manager.find(CalendarEntity, {
+      where: { id: In(rows.flatMap(({ published }) => published.map(({ calendarId }) => calendarId))) },
+      relations: { place: true },
+    });
+    const byId = new Map(calendars.map((calendar) => [calendar.id, calendar]));
+    return rows.flatMap(({ id, at, published }) =>
+      published.flatMap(({ calendarId, number, label }) => {
+        const calendar = byId.get(calendarId);
+        if (calendar?.publishedNumber !== number) return [];
+        const { year, place } = calendar;
+        return [
+          { withdrawalId: id, calendarId, placeName: place.name, year, number, label, at: at.toISOString() },
+        ];
+      }),
+    );
+  }
+
+  async markReplaced(actor: Actor, id: string): Promise<void> {
+    const { affected } = await this.dataSource.manager.update(
+      WithdrawalEntity,
+      { id, communityId: actor.communityId },
+      { sheetsReplacedAt: this.clock.now() },
+    );
+    if (affected === 0) throw notFound();
+  }
+
+  /** A thing that this person may take back; anything else is not there, or not theirs. */
+  private async own(
+    manager: EntityManager,
+    actor: Actor,
+    itemType: SharedItemType,
+    itemId: string,
+  ): Promise<ItemSharingEntity> {
+    const row = await lockSharing(manager, itemType, itemId);
+    if (row?.communityId !== actor.communityId) throw notFound();
+    if (await this.mayTakeBack(manager, actor, row)) return row;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    throw maySee(viewer, row) ? conflict('not-the-giver') : notFound();
+  }
+
+  /** Giver and successor; elders of what they see; steward and officer for whoever asks them, whatever the level. */
+  private async mayTakeBack(manager: EntityManager, actor: Actor, row: ItemSharingEntity): Promise<boolean> {
+    const { giverId, details } = row;
+    if (giverId === actor.person.id || details.successorId === actor.person.id) return true;
+    if (hasRole(actor, 'steward', 'officer')) return true;
+    if (!hasRole(actor, 'elder')) return false;
+    return maySee(await viewerOf(manager, actor, this.clock.now()), { ...row, state: 'shared' });
+  }
+
+  private async setState(
+    manager: EntityManager,
+    { itemType, itemId }: ItemSharingEntity,
+    state: 'shared' | 'paused',
+  ): Promise<void> {
+    await manager.update(ItemSharingEntity, { itemType, itemId }, { state, stateAt: this.clock.now() });
+  }
+
+  private async record(
+    manager: EntityManager,
+    actor: Actor,
+    { itemType, itemId }: ItemSharingEntity,
+    action: Action,
+    askedBy: string | null,
+  ): Promise<void> {
+    await recordAudit(manager, {
+      at: this.clock.now(),
+      communityId: actor.communityId,
+      actorId: actor.person.id,
+      action,
+      subjectType: itemType === 'story' ? 'figure' : itemType === 'variant' ? 'entry' : itemType,
+      subjectId: itemId,
+      details: askedBy === null ? {} : { askedBy },
+    });
+  }
+}
+
+function mayResume(actor: Actor, { giverId, stateAt }: ItemSharingEntity, now: Date): boolean {
+  return giverId === actor.person.id || (stateAt !== null && now <= addDays(stateAt, PAUSE_DAYS));
+}
+
+async function expectOfVillage(
+  manager: EntityManager,
+  { communityId }: Actor,
+  personId: string | null,
+): Promise<void> {
+  if (personId !== null && !(await manager.existsBy(MembershipEntity, { communityId, personId }))) {
+    throw invalidField('askedById', 'not-of-this-village');
+  }
+}

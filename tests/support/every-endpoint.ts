@@ -1,0 +1,47 @@
+import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
+import { ENDPOINTS } from '#shared/contracts/index.js';
+import type { Client } from './api.js';
+import { readPdfText } from './pdf/read-text.js';
+
+/** What stands for the parameters of paths, and queries to try, by endpoint. */
+export interface Askable {
+  params: Record<string, readonly string[]>;
+  queries: Record<string, readonly string[]>;
+}
+
+export const READING = ENDPOINTS.filter(({ method }) => method === 'GET');
+
+/** An answer as text, whatever it is: a PDF as another program reads it. */
+export async function textOf(
+  client: Client,
+  path: string,
+  { fileType }: Pick<Endpoint, 'fileType'>,
+): Promise<string> {
+  if (fileType !== 'application/pdf') return (await client.get(path)).text;
+  const answer = await client
+    .get(path)
+    .buffer(true)
+    .parse((response, done) => {
+      const parts: Buffer[] = [];
+      response.on('data', (part: Buffer) => parts.push(part));
+      response.on('end', () => {
+        done(null, Buffer.concat(parts));
+      });
+    });
+  const file = answer.body as Buffer;
+  return file.subarray(0, 5).toString() === '%PDF-' ? readPdfText(file) : file.toString();
+}
+
+/** Every path of the endpoint that names something of the village. */
+export function pathsOf(endpoint: Endpoint, village: Askable): string[] {
+  const values = village.params;
+  const names = [...endpoint.path.matchAll(/:([A-Za-z]+)/gu)].map(([, name = '']) => name);
+  let filled: Record<string, string>[] = [{}];
+  for (const name of names) {
+    const list = values[name];
+    if (!list) throw new Error(`Say in levelled-village.ts what stands for :${name} of ${endpoint.id}.`);
+    filled = filled.flatMap((params) => list.map((value) => ({ ...params, [name]: value })));
+  }
+  const queries = village.queries[endpoint.id] ?? [''];
+  return filled.flatMap((params) => queries.map((query) => fillPath(endpoint.path, params) + query));
+}
