@@ -54,6 +54,8 @@ import { erasersOf } from './features/withdrawals/erasers.service.js';
 import { WithdrawalsService } from './features/withdrawals/withdrawals.service.js';
 import { withdrawalsRoutes } from './features/withdrawals/withdrawals.routes.js';
 import type { WithdrawalList } from './storage/withdrawal-list.js';
+import { variantsRoutes } from './features/variants/variants.routes.js';
+import { VariantsService } from './features/variants/variants.service.js';
 import { GroupsService } from './features/sharing/groups.service.js';
 import { ItemSharingService } from './features/sharing/item-sharing.service.js';
 import { sharingRoutes } from './features/sharing/sharing.routes.js';
@@ -185,6 +187,7 @@ export function createApp(options: AppOptions): App {
   const publishing = new PublishingService(dataSource, clock, contents, versions);
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
+  variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const answers = new AnswersService(dataSource, clock);
   reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));

@@ -25,8 +25,10 @@ export async function entrySight(
   manager: EntityManager,
   viewer: Viewer,
   things: readonly SeenThing[],
+  /** Variants are asked about as entries are, with their own rows. */
+  itemType: 'entry' | 'variant' = 'entry',
 ): Promise<EntrySight> {
-  const { both, sharedOf } = await sharedOfThings(manager, things);
+  const { both, sharedOf } = await sharedOfThings(manager, things, itemType);
   return {
     appearance: (thing) =>
       both(thing)
@@ -43,7 +45,7 @@ export async function keptEntryIds(
   manager: EntityManager,
   things: readonly SeenThing[],
 ): Promise<Set<string>> {
-  const { both } = await sharedOfThings(manager, things);
+  const { both } = await sharedOfThings(manager, things, 'entry');
   const kept = things.filter((thing) => both(thing).some(standsApart));
   return new Set(kept.map(({ entryId }) => entryId));
 }
@@ -53,10 +55,14 @@ function standsApart(shared: Shared | undefined): boolean {
   return shared?.state !== 'shared' || isKept(shared);
 }
 
-async function sharedOfThings(manager: EntityManager, things: readonly SeenThing[]) {
+async function sharedOfThings(
+  manager: EntityManager,
+  things: readonly SeenThing[],
+  itemType: 'entry' | 'variant',
+) {
   const entries = await sharedById(
     manager,
-    'entry',
+    itemType,
     things.map(({ entryId }) => entryId),
   );
   const figures = await sharedById(

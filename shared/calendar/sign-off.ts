@@ -126,6 +126,27 @@ export function keptEntryStands(entry: KeptEntry, answers: readonly AnswerFact[]
   return agreed && !opposed;
 }
 
+export type EntryOutcome =
+  'with-reviewers' | 'changes-asked' | 'held-back' | 'agreed' | 'agreed-with-differences';
+
+/**
+ * Where one entry stands. Differences that its people let stand, or variants beside it, make "agreed with differences":
+ * a full outcome, not half of one. Nothing is counted and nobody is outvoted.
+ */
+export function entryOutcome(
+  entry: ReviewedEntry,
+  answers: readonly AnswerFact[],
+  writerIds: ReadonlySet<string>,
+  hasVariants: boolean,
+): EntryOutcome {
+  const given = answersByEntry([entry], answers).get(entry.entryId) ?? [];
+  if (given.some(({ answer }) => answer === 'not-for-the-board')) return 'held-back';
+  const asked = given.filter(({ answer }) => answer === 'change-this');
+  if (asked.some(({ letStand }) => !letStand)) return 'changes-asked';
+  if (!given.some(({ answer, elderId }) => answer === 'agree' && !writerIds.has(elderId))) return 'with-reviewers';
+  return asked.length > 0 || hasVariants ? 'agreed-with-differences' : 'agreed';
+}
+
 /** How many entries of the submission an elder has answered, by themselves or through somebody who wrote it down. */
 export function answeredCount(
   elderId: string,

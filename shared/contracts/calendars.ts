@@ -130,6 +130,14 @@ const entryFields = z.strictObject({
   giverId: id.nullable().optional(),
   agreedToPrint: z.boolean(),
   sharingLevel,
+  /** Which timing drives the board where there are variants; the reason is for keepers to read. Left out for the entry's own. */
+  board: z
+    .strictObject({
+      shows: z.enum(['entry', 'variant', 'both']),
+      variantId: id.nullable(),
+      reason: line(300, 1),
+    })
+    .optional(),
   /** Beside the level; left out where there is nothing to say, so that older texts and hashes stay as they are. */
   sharing: sharingDetails.optional(),
 });

@@ -19,6 +19,7 @@ import { sheetsEndpoints } from './sheets.js';
 import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
 import { todayEndpoints } from './today.js';
+import { variantsEndpoints } from './variants.js';
 import { withdrawalsEndpoints } from './withdrawals.js';
 import { versionsEndpoints } from './versions.js';
 
@@ -37,6 +38,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   airEndpoints,
   figuresEndpoints,
   calendarsEndpoints,
+  variantsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,
   attachmentsEndpoints,

@@ -56,6 +56,17 @@ export const elderProgress = z.strictObject({
 });
 export type ElderProgress = z.infer<typeof elderProgress>;
 
+export const ENTRY_OUTCOMES = [
+  'with-reviewers',
+  'changes-asked',
+  'held-back',
+  'agreed',
+  'agreed-with-differences',
+] as const;
+/** Where each entry stands that the person sees. */
+export const outcome = z.strictObject({ entryId: id, outcome: z.enum(ENTRY_OUTCOMES) });
+export type Outcome = z.infer<typeof outcome>;
+
 const numberParams = z.strictObject({ calendarId: id, number: submissionNumber });
 const answerParams = z.strictObject({ calendarId: id, number: submissionNumber, entryId: id });
 
@@ -67,7 +78,7 @@ export const reviewsEndpoints = {
     summary: 'Answers to the entries of a submission, and how far each elder is',
     access: member('calendar', 'officer', 'elder', 'steward'),
     params: numberParams,
-    response: listOf(answer).extend({ progress: z.array(elderProgress) }),
+    response: listOf(answer).extend({ progress: z.array(elderProgress), outcomes: z.array(outcome) }),
   }),
   putAnswer: defineEndpoint({
     id: 'putAnswer',

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { id, instant, line, listOf } from './common.js';
 import { entryDates, entryInput } from './calendars.js';
+import { frozenVariant } from './variants.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { language, ROLES, signOffRule } from './people.js';
 import { markerNames, nightSegment, placeSnapshot } from './stars.js';
@@ -44,10 +45,30 @@ export const versionHeader = z.strictObject({
 });
 export type VersionHeader = z.infer<typeof versionHeader>;
 
-export const versionEntryBody = z.strictObject({ entryId: id, content: entryInput, dates: entryDates });
+/** A variant beside its entry; `forBoard` where the village's board may go by it. */
+export const seenVariant = frozenVariant.extend({ forBoard: z.boolean() });
+export type SeenVariant = z.infer<typeof seenVariant>;
+
+export const versionEntryBody = z.strictObject({
+  entryId: id,
+  content: entryInput,
+  dates: entryDates,
+  /** Each frozen and hashed apart from the entry; left out where there are none to see. */
+  variants: z.array(seenVariant).optional(),
+});
 export type VersionEntryBody = z.infer<typeof versionEntryBody>;
 
+export const versionVariant = seenVariant.extend({
+  salt: z.string(),
+  hash: z.string(),
+  rank: z.number().int(),
+  redacted: z.boolean(),
+});
+
+export type VersionVariant = z.infer<typeof versionVariant>;
+
 export const versionEntry = versionEntryBody.extend({
+  variants: z.array(versionVariant).optional(),
   position: z.number().int(),
   /** Hex; with the canonical JSON it gives `hash`. */
   salt: z.string(),

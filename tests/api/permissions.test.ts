@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { WithdrawalEntity } from '#server/db/entities/withdrawal.entity.js';
 import { VillageGroupEntity } from '#server/db/entities/village-group.entity.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { addVariant, variantInput } from '#tests/support/variant-api.js';
 import { addGroup } from '#tests/support/sharing-api.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
@@ -43,6 +44,7 @@ interface Village {
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
   groupId: string;
+  variantId: string;
   withdrawalId: string;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
@@ -150,6 +152,7 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     attachmentId: village.attachmentId,
     part: '1',
     groupId: village.groupId,
+    variantId: village.variantId,
     withdrawalId: village.withdrawalId,
     itemType: 'entry',
     itemId: village.entryId,
@@ -232,6 +235,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     // An elder writes what is kept; the village's entries are the officer's.
     addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
+    addVariant: () => variantInput(),
+    updateVariant: () => ({ content: variantInput(), ...stale }),
     addGroup: () => ({ name: `Menders ${role ?? ''}`, memberIds: [village.elderId] }),
     updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
     // Nobody of these gave it or is asked for it: the thing stays.
@@ -254,6 +259,7 @@ async function furnishOwn(): Promise<Village> {
   const village = await openVillage(api);
   const calendar = await beginCalendar(village);
   const entry = await addEntry(village.officer, calendar.id);
+  const { variantId } = await addVariant(village.officer, calendar.id, entry.id);
   const published = await publishDraft(village, calendar.id);
   await addEntry(village.officer, calendar.id, { titleOfficer: 'Weed' });
   const reviewed = await submit(village.officer, calendar.id);
@@ -271,6 +277,7 @@ async function furnishOwn(): Promise<Village> {
     figureId,
     attachmentId: (await addPicture(village.elder, figureId)).id,
     withdrawalId: await aWithdrawal(village.officer.communityId),
+    variantId,
     groupId: (await addGroup(village.steward, 'Weavers', [village.elder])).id,
     elderId: village.elder.personId,
     publishedNumber: published.number,
@@ -284,6 +291,7 @@ async function furnishOther(): Promise<Village> {
   const home = await homeOf(officer);
   const calendar = await beginCalendar({ ...(await openVillage(api)), officer, placeId: home.place.id });
   const entry = await addEntry(officer, calendar.id);
+  const { variantId } = await addVariant(officer, calendar.id, entry.id);
   const { number } = await submit(officer, calendar.id);
   const figureId = (await addFigure(officer)).id;
   return {
@@ -294,6 +302,7 @@ async function furnishOther(): Promise<Village> {
     figureId,
     attachmentId: (await addPicture(officer, figureId)).id,
     withdrawalId: await aWithdrawal(home.community.id),
+    variantId,
     groupId: await firstGroup(home.community.id),
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,

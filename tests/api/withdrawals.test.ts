@@ -26,6 +26,7 @@ import {
 } from '#tests/support/calendar-api.js';
 import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 import { addFigure } from '#tests/support/figure-api.js';
+import { addVariant } from '#tests/support/variant-api.js';
 import { furnishLevels } from '#tests/support/levelled-village.js';
 
 /**
@@ -63,6 +64,7 @@ describe('a withdrawn entry', () => {
       ...{ ifLate: WORD, giver: WORD, giverId: village.elder.personId },
     });
     await addPicture(village.officer, entry.id, { subjectType: 'entry', title: WORD });
+    await addVariant(village.elder3, calendarId, entry.id, { giver: WORD, note: WORD, otherSigns: WORD });
     const version = await submit(village.officer, calendarId);
     const answer = `${versionPath(version)}/entries/${entry.id}/answer`;
     await village.elder3.put(answer, says({ answer: 'not-mine-to-say', note: WORD })).expect(200);
@@ -187,6 +189,7 @@ describe('a withdrawn entry', () => {
         attachmentId: [entry.id],
         part: ['1'],
         withdrawalId: [entry.id],
+        variantId: [entry.id],
       },
       queries: {
         compareVersions: ['?from=1&to=draft'],

@@ -15,6 +15,8 @@ import {
   versionPath,
   type Village,
 } from './calendar-api.js';
+import type { Variant, VariantInput } from '#shared/contracts/variants.js';
+import { variantInput } from './variant-api.js';
 import { addFigure, figureInput } from './figure-api.js';
 import { addGroup, details } from './sharing-api.js';
 
@@ -101,7 +103,7 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       plant('elders figure', ['giver', 'heir', 'weaver']),
     ),
   };
-  await give('open entry', officer, VILLAGE, { sharingLevel: 'open' });
+  const open = await give('open entry', officer, VILLAGE, { sharingLevel: 'open' });
   await give('village entry', officer, VILLAGE, { sharingLevel: 'village' });
   const kept = [
     await give('group entry', elder, ['giver', 'weaver', 'observer of the group'], {
@@ -129,6 +131,28 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
         occurrence: 1,
       },
     }),
+  ];
+  const variant = async (
+    where: string,
+    entryId: string,
+    seers: readonly string[],
+    level: VariantInput['sharingLevel'],
+  ) => {
+    const word = plant(where, seers);
+    const path = `/api/calendars/${calendar.id}/entries/${entryId}/variants`;
+    const body = variantInput({
+      giver: word,
+      note: word,
+      otherSigns: word,
+      ifLate: word,
+      sharingLevel: level,
+    });
+    return (await elder.post(path, body).expect(201)).body as Variant;
+  };
+  const variants = [
+    await variant('village variant', open.id, VILLAGE, 'village'),
+    await variant('elders variant', open.id, ['giver', 'heir', 'weaver'], 'elders'),
+    await variant('variant of a kept entry', kept[1]?.id ?? '', ['giver', 'heir', 'weaver'], 'village'),
   ];
   const first = await submit(officer, calendar.id);
   for (const entry of kept) {
@@ -166,13 +190,14 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       communityId: [officer.communityId],
       placeId: [village.placeId],
       calendarId: [calendar.id],
-      entryId: kept.map(({ id }) => id),
+      entryId: [open, ...kept].map(({ id }) => id),
       number: [...numbers, 'draft'],
       figureId: Object.values(figures).map(({ id }) => id),
       markerKey: Object.values(figures).map(({ markerKey }) => markerKey),
       itemType: [...SHARED_ITEM_TYPES],
       itemId: [...kept, ...Object.values(figures)].map(({ id }) => id),
       groupId: [group.id],
+      variantId: variants.map(({ variantId }) => variantId),
       attachmentId: [randomUUID()],
       withdrawalId: [randomUUID()],
       part: ['0', '1'],

@@ -21,6 +21,8 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
+import { EntryVariantEntity } from './entry-variant.entity.js';
+import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
 
@@ -51,4 +53,6 @@ export const ENTITIES = [
   ItemSharingEntity,
   KeptReadEntity,
   WithdrawalEntity,
+  EntryVariantEntity,
+  VersionVariantEntity,
 ];

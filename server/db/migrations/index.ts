@@ -5,6 +5,7 @@ import { Sharing1796600000000 } from './1796600000000-sharing.js';
 import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 import { Attachments1797200000000 } from './1797200000000-attachments.js';
 import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
+import { Variants1798000000000 } from './1798000000000-variants.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -15,4 +16,5 @@ export const MIGRATIONS = [
   RainMonths1797000000000,
   Attachments1797200000000,
   Withdrawals1797800000000,
+  Variants1798000000000,
 ];

@@ -319,9 +319,10 @@ async function expectKnownMarker(
 
 /** Names of the fields that differ; what stands in them stays out of the record. */
 function changedFields(before: EntryInput, after: EntryInput): string[] {
-  return Object.entries(after)
-    .filter(([field, value]) => !sameJson(before[field as keyof EntryInput], value))
-    .map(([field]) => field)
+  const was = new Map<string, unknown>(Object.entries(before));
+  const is = new Map<string, unknown>(Object.entries(after));
+  return [...new Set([...was.keys(), ...is.keys()])]
+    .filter((field) => !sameJson(was.get(field) ?? null, is.get(field) ?? null))
     .sort();
 }
 

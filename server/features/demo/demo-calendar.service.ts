@@ -15,11 +15,13 @@ import { SigningService } from '../reviews/signing.service.js';
 import { FrozenContentService } from '../versions/frozen-content.service.js';
 import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
+import { VariantsService } from '../variants/variants.service.js';
 import { DEMO_DOMAIN, UPPER_TAZIMEL } from './demo-villages.data.js';
 import {
   SECOND_ROUND,
   STANDING_DIFFERENCE,
   TAZIMEL_ENTRIES,
+  VARIANTS,
   WITHHELD_ENTRY,
 } from './tazimel-entries.data.js';
 
@@ -76,6 +78,7 @@ class DemoRound {
   private at: Date;
   private readonly calendars: CalendarsService;
   private readonly entries: EntriesService;
+  private readonly variants: VariantsService;
   private readonly publishing: PublishingService;
   private readonly answers: AnswersService;
   private readonly signing: SigningService;
@@ -95,6 +98,7 @@ class DemoRound {
     const contents = new FrozenContentService(dataSource, playClock, sky);
     this.calendars = new CalendarsService(dataSource, playClock);
     this.entries = new EntriesService(dataSource, playClock, sky);
+    this.variants = new VariantsService(dataSource, playClock, sky);
     this.publishing = new PublishingService(dataSource, playClock, contents, versions);
     this.answers = new AnswersService(dataSource, playClock);
     this.signing = new SigningService(dataSource, playClock, versions);
@@ -112,6 +116,10 @@ class DemoRound {
     this.calendarId = id;
     for (const { code, content } of TAZIMEL_ENTRIES) {
       this.idByCode.set(code, (await this.entries.add(officer, id, content)).id);
+    }
+    for (const { code, content, by } of VARIANTS) {
+      const giverId = by === null ? null : this.cast[by].person.id;
+      await this.variants.add(officer, id, this.idByCode.get(code) ?? '', { ...content, giverId });
     }
     this.withheldId = (await this.entries.add(this.cast.elder3, id, WITHHELD_ENTRY)).id;
     this.daysLater(3);

@@ -1,3 +1,4 @@
+import type { VariantInput } from '#shared/contracts/variants.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 
 /**
@@ -344,6 +345,56 @@ export const TAZIMEL_ENTRIES: readonly { code: string; content: EntryInput }[] =
       giver: 'Elder A-2',
       agreedToPrint: true,
       sharingLevel: 'village',
+    },
+  },
+];
+
+/** Other keepers' timings that stand beside an entry. */
+export const VARIANTS: readonly {
+  code: string;
+  content: Omit<VariantInput, 'giverId'>;
+  by: 'elder3' | null;
+}[] = [
+  {
+    code: 'A03',
+    by: null,
+    content: {
+      difference: 'other-marker',
+      lead: {
+        type: 'sky',
+        spec: {
+          kind: 'moon-counted',
+          markerKey: 'pleiades',
+          phenomenon: 'heliacal-rising',
+          event: 'first-crescent',
+          count: 1,
+        },
+        occurrence: 1,
+      },
+      offsets: { earliestDays: 0, bestFromDays: 0, bestToDays: 2, lastAdvisedDays: 4 },
+      otherSigns: 'The thin Moon seen at dusk',
+      ifLate: 'Hold it on the next market day',
+      giver: 'A second family',
+      confidence: 'fair',
+      basis: 'handed-down',
+      note: 'They hold it on the thin Moon after the Cluster has been seen.',
+      sharingLevel: 'village',
+    },
+  },
+  {
+    code: 'A04',
+    by: 'elder3',
+    content: {
+      difference: 'other-marker',
+      lead: { type: 'marker', markerKey: 'hr1457', phenomenon: 'heliacal-rising', occurrence: 1 },
+      offsets: { earliestDays: 3, bestFromDays: 7, bestToDays: 23, lastAdvisedDays: 28 },
+      otherSigns: 'The red star seen at dawn; soil wet to a hand depth',
+      ifLate: 'Short millet, as everybody',
+      giver: 'Elder A-3',
+      confidence: 'strong',
+      basis: 'handed-down',
+      note: 'Waits for the red star, some days later than the Cluster.',
+      sharingLevel: 'open',
     },
   },
 ];

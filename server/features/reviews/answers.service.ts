@@ -1,6 +1,6 @@
-import { answeredCount, type ReviewState } from '#shared/calendar/sign-off.js';
+import { answeredCount, entryOutcome, type ReviewState } from '#shared/calendar/sign-off.js';
 import type { AuditAction } from '#shared/contracts/audit.js';
-import type { Answer, AnswerInput, ElderProgress } from '#shared/contracts/reviews.js';
+import type { Answer, AnswerInput, ElderProgress, Outcome } from '#shared/contracts/reviews.js';
 import type { VersionEntry } from '#shared/contracts/versions.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
@@ -27,6 +27,7 @@ export interface AnswerList {
   items: Answer[];
   nextCursor: null;
   progress: ElderProgress[];
+  outcomes: Outcome[];
 }
 
 /** Where an answer belongs. */
@@ -63,6 +64,10 @@ export class AnswersService {
     return {
       items: rows.map((row) => toAnswer(row, names, actor.person.id)),
       nextCursor: null,
+      outcomes: seen.map(({ entryId, hash, variants = [] }) => ({
+        entryId,
+        outcome: entryOutcome({ entryId, hash }, review.answers, review.writerIds, variants.length > 0),
+      })),
       progress: progressOf(review, elderIds, names).map((elder) =>
         elder.elderId === actor.person.id ? ownProgress(elder, seen, review) : elder,
       ),

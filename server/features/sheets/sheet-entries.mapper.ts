@@ -3,6 +3,7 @@ import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import type { SheetEntry } from '#shared/sheet/sheet-model.js';
 import type { SheetWords } from '#shared/sheet/sheet-words.js';
 import type { Translate } from '../../print/translator.js';
+import { boardOf } from '../versions/board.service.js';
 import { whyNoDate } from './why-no-date.js';
 
 /** A belief is printed only where its giver was asked and agreed; everything else of a calendar is for the wall. */
@@ -27,10 +28,11 @@ export function toSheetEntries(
 ): SheetEntry[] {
   return bodies
     .filter(({ content }) => needsALine(content))
-    .map(({ content, dates }, index) => ({
+    .flatMap((body) => linesOf(body, texts.files))
+    .map(({ content, dates, title }, index) => ({
       number: index + 1,
       icon: content.icon,
-      titles: { village: content.titleVillage, officer: content.titleOfficer },
+      titles: title,
       window: {
         earliest: dates.window?.earliest ?? null,
         bestFrom: dates.window?.bestFrom ?? null,
@@ -47,6 +49,34 @@ export function toSheetEntries(
       caution: content.caution,
       whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
     }));
+}
+
+interface Line extends Body {
+  title: SheetEntry['titles'];
+}
+
+/** The entry by the days that drive the board, and every timing that is shown beside it, each a mark of its own. */
+function linesOf(body: VersionEntryBody, files: Translate): Line[] {
+  const { content, dates, variants = [] } = body;
+  const title = { village: content.titleVillage, officer: content.titleOfficer };
+  const { window, drivenBy, beside } = boardOf(body);
+  const joined = drivenBy !== 'entry' && drivenBy !== 'variant';
+  const told = (code: 'ownDays' | 'otherDays' | 'safeDays', giver: string) => ({
+    village: title.village,
+    officer: files(`sheet.${code}`, { title: title.officer, giver }),
+  });
+  const marks = beside.flatMap(({ variantId, window: own }): Line[] => {
+    const variant = variants.find((one) => one.variantId === variantId);
+    const dated = { ...(variant?.dates ?? dates), window: own };
+    const plain = { ...content, hasLastDate: false, lastDate: null, caution: '' };
+    if (variant === undefined)
+      return [{ content: plain, dates: dated, title: told('ownDays', content.giver) }];
+    const { lead, otherSigns, ifLate, giver } = variant.content;
+    const timed = { ...plain, lead, otherSigns, ifLate };
+    return [{ content: timed, dates: dated, title: told('otherDays', giver) }];
+  });
+  const first = { content, dates: { ...dates, window }, title: joined ? told('safeDays', '') : title };
+  return [first, ...marks];
 }
 
 /** What is nothing but a marker stands among the markers, unless it has more to say. */

@@ -9,6 +9,7 @@ import type { Clock } from '../../http/context.js';
 import type { CalendarsService } from '../calendars/calendars.service.js';
 import { civilDateAt } from '../places/place-day.service.js';
 import type { PlacesService } from '../places/places.service.js';
+import { boardOf } from '../versions/board.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import type { ComingMarkersService, PublishedCalendar } from './coming-markers.service.js';
 import { comingSigns } from './coming-signs.service.js';
@@ -97,7 +98,9 @@ function choosePlace(
 }
 
 function openWindows({ calendarId, entries }: CalendarContent, date: string): OpenWindow[] {
-  return entries.flatMap(({ entryId, content, dates: { window } }) => {
+  return entries.flatMap((entry) => {
+    const { entryId, content } = entry;
+    const { window } = boardOf(entry);
     if (window === null || date < window.earliest || date > window.lastAdvised) return [];
     return [
       {

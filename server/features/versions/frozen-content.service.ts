@@ -1,5 +1,6 @@
 import { wasPublished } from '#shared/calendar/version-state.js';
 import type {
+  SeenVariant,
   VersionEntry,
   VersionEntryBody,
   VersionHeader,
@@ -9,19 +10,27 @@ import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type { DataSource, EntityManager } from 'typeorm';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import type { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import type { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
+import { draftVariants } from '../variants/draft-variants.service.js';
 import { readDraft } from '../calendars/draft.service.js';
 import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { checkSeal, leavesOf, newSalt } from './seal.service.js';
-import { cutHeader, entriesForVillage, seenOfDraft, seenOfVersion } from './seen-content.service.js';
-import { toHeader, toVersionEntry } from './versions.mapper.js';
-import { findVersion, frozenEntries } from './versions.repository.js';
+import {
+  contentsOf,
+  cutHeader,
+  entriesForVillage,
+  seenOfDraft,
+  seenOfVersion,
+} from './seen-content.service.js';
+import { toHeader, toVersionEntry, toVersionVariant } from './versions.mapper.js';
+import { findVersion, frozenEntries, frozenVariants } from './versions.repository.js';
 
 /** What a version says, or what the draft would say if it were submitted now. */
 export interface CalendarContent {
@@ -89,7 +98,24 @@ export class FrozenContentService {
   ): Promise<{ header: VersionHeader; entries: VersionEntryBody[] }> {
     const { place, entries } = await readDraft(manager, this.sky, calendar);
     const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
-    const contents = entries.map(({ row }) => row.content);
+    const beside = await draftVariants(
+      manager,
+      this.sky,
+      place,
+      calendar.year,
+      entries.map(({ row }) => row),
+    );
+    const bodies = entries.map(({ row, dates }): VersionEntryBody => {
+      const variants = beside
+        .filter((variant) => variant.row.entryId === row.id)
+        .map((variant) => ({
+          ...{ variantId: variant.row.id, content: variant.row.content, dates: variant.dates },
+          forBoard: false,
+        }));
+      const body = { entryId: row.id, content: row.content, dates };
+      return variants.length === 0 ? body : { ...body, variants };
+    });
+    const contents = contentsOf(bodies);
     return {
       header: {
         schema: 1,
@@ -107,7 +133,7 @@ export class FrozenContentService {
         markers: this.sky.frozenMarkers(place, calendar.year, contents),
         salt: newSalt(),
       },
-      entries: entries.map(({ row, dates }) => ({ entryId: row.id, content: row.content, dates })),
+      entries: bodies,
     };
   }
 }
@@ -134,11 +160,25 @@ export async function frozenContent(
   version: CalendarVersionEntity,
 ): Promise<{ header: VersionHeader; entries: VersionEntry[]; leaves: string[] }> {
   const rows = await frozenEntries(manager, version.id);
+  const variants = await frozenVariants(manager, version.id);
   const { headerText, headerHash, headerRedacted, hash, leaves } = version;
   const scheme = version.scheme === 1 ? 1 : 2;
-  const sealed = { scheme, headerText, headerHash, headerRedacted, hash, leaves, entries: rows } as const;
+  const sealed = {
+    scheme,
+    headerText,
+    headerHash,
+    headerRedacted,
+    hash,
+    leaves,
+    entries: rows,
+    variants,
+  } as const;
   checkSeal(sealed);
-  return { header: toHeader(version), entries: rows.map(toVersionEntry), leaves: leavesOf(sealed) };
+  return {
+    header: toHeader(version),
+    entries: rows.map((row) => withVariants(row, variants)),
+    leaves: leavesOf(sealed),
+  };
 }
 
 /** One entry as it was frozen. */
@@ -146,6 +186,18 @@ export function frozenEntry(row: VersionEntryEntity): VersionEntry {
   return toVersionEntry(row);
 }
 
-function bodyOf({ entryId, content, dates }: VersionEntry): VersionEntryBody {
-  return { entryId, content, dates };
+function withVariants(row: VersionEntryEntity, all: readonly VersionVariantEntity[]): VersionEntry {
+  const own = all.filter(({ entryId }) => entryId === row.entryId).map(toVersionVariant);
+  const entry = toVersionEntry(row);
+  return own.length === 0 ? entry : { ...entry, variants: own };
+}
+
+function bodyOf({ entryId, content, dates, variants }: VersionEntry): VersionEntryBody {
+  const body = { entryId, content, dates };
+  if (variants === undefined) return body;
+  const plain = variants.map((variant): SeenVariant => {
+    const { salt: _salt, hash: _hash, rank: _rank, redacted: _redacted, ...seen } = variant;
+    return seen;
+  });
+  return { ...body, variants: plain };
 }

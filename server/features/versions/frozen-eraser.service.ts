@@ -4,6 +4,8 @@ import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import type { EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
+import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import type { PublishedTrace } from '../../db/entities/withdrawal.entity.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
@@ -37,6 +39,29 @@ export async function eraseFrozenEntry(
     .map(({ calendarVersion }) => calendarVersion)
     .filter(({ state }) => wasPublished(state))
     .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
+}
+
+/** Takes a variant out of every version that froze it; its leaf stays. */
+export async function eraseFrozenVariant(
+  manager: EntityManager,
+  variantId: string,
+): Promise<PublishedTrace[]> {
+  const rows = await manager.find(VersionVariantEntity, {
+    where: { variantId },
+    relations: { calendarVersion: true },
+  });
+  await manager.delete(VersionVariantEntity, { variantId });
+  return rows
+    .map(({ calendarVersion }) => calendarVersion)
+    .filter(({ state }) => wasPublished(state))
+    .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
+}
+
+/** Variants of an entry, in its draft and wherever they were frozen. */
+export async function variantIdsOf(manager: EntityManager, entryId: string): Promise<string[]> {
+  const drafted = await manager.findBy(EntryVariantEntity, { entryId });
+  const frozen = await manager.findBy(VersionVariantEntity, { entryId });
+  return [...new Set([...drafted.map(({ id }) => id), ...frozen.map(({ variantId }) => variantId)])];
 }
 
 /** Takes the giver's name off an entry wherever it was frozen; that entry's own hash cannot be made again then. */

@@ -6,6 +6,7 @@ import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
+import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
@@ -39,7 +40,10 @@ export class PublishingService {
       if (header.weatherContact === '' || header.agricultureContact === '')
         throw conflict('contacts-missing');
       const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
-      const sealed = seal(header, entries, await earlierSeals(manager, calendarId));
+      const variants = entries.flatMap(({ entryId, variants: beside = [] }) =>
+        beside.map((variant) => ({ ...variant, entryId })),
+      );
+      const sealed = seal(header, entries, variants, await earlierSeals(manager, calendarId));
       const row = manager.create(CalendarVersionEntity, {
         id: randomUUID(),
         calendarId,
@@ -62,6 +66,9 @@ export class PublishingService {
       });
       await manager.insert(CalendarVersionEntity, row);
       await insertEntries(manager, row.id, sealed.entries);
+      for (const variant of sealed.variants) {
+        await manager.insert(VersionVariantEntity, { id: randomUUID(), versionId: row.id, ...variant });
+      }
       await manager.update(
         CalendarEntity,
         { id: calendarId },

@@ -5,6 +5,7 @@ import {
   versionHashText,
   type HashScheme,
 } from '#shared/calendar/hash-text.js';
+import type { FrozenVariant } from '#shared/contracts/variants.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { createHash, randomBytes, randomInt } from 'node:crypto';
@@ -25,6 +26,20 @@ export interface SealedEntry extends EntrySeal {
   redacted?: boolean;
 }
 
+/** A variant, sealed apart from its entry. */
+export interface SealedVariant extends EntrySeal {
+  entryId: string;
+  variantId: string;
+  position: number;
+  bodyText: string;
+  rank: number;
+  redacted?: boolean;
+}
+
+export interface VariantBody extends FrozenVariant {
+  entryId: string;
+}
+
 export interface SealedVersion {
   scheme: HashScheme;
   headerText: string;
@@ -35,6 +50,7 @@ export interface SealedVersion {
   /** Null in a version of scheme 1 that is still whole. */
   leaves: string[] | null;
   entries: SealedEntry[];
+  variants: SealedVariant[];
 }
 
 /** A stored version whose text and hashes do not belong together: somebody changed it past the product. */
@@ -50,6 +66,7 @@ class BrokenSealError extends Error {
 export function seal(
   header: VersionHeader,
   bodies: readonly VersionEntryBody[],
+  variantBodies: readonly VariantBody[],
   earlier: ReadonlyMap<string, readonly EntrySeal[]>,
 ): SealedVersion {
   const headerText = canonicalJson(header);
@@ -64,7 +81,16 @@ export function seal(
     rank += randomInt(1, RANK_STEP_MAX);
     return { entryId: body.entryId, bodyText, salt, hash: sha256(entryHashText(salt, bodyText)), rank };
   });
-  const leaves = filledUp(entries.map((entry) => sha256(leafText(entry.rank, entry.hash))));
+  const variants = variantBodies.map(({ entryId, variantId, content, dates }, position): SealedVariant => {
+    const bodyText = canonicalJson({ entryId, variantId, content, dates });
+    const salt = newSalt();
+    rank += randomInt(1, RANK_STEP_MAX);
+    const hash = sha256(entryHashText(salt, bodyText));
+    return { entryId, variantId, position, bodyText, salt, hash, rank };
+  });
+  const leaves = filledUp(
+    [...entries, ...variants].map((sealed) => sha256(leafText(sealed.rank, sealed.hash))),
+  );
   return {
     scheme: 2,
     headerText,
@@ -72,6 +98,7 @@ export function seal(
     hash: sha256(versionHashText(2, headerHash, leaves)),
     leaves,
     entries,
+    variants,
   };
 }
 
@@ -98,7 +125,7 @@ export function checkSeal(version: SealedVersion): void {
   const intact =
     (version.headerRedacted === true || sha256(headerText) === headerHash) &&
     ranks.every((rank, index) => scheme === 1 || rank > (ranks[index - 1] ?? 0)) &&
-    version.entries.every(
+    [...version.entries, ...version.variants].every(
       (entry) =>
         (entry.redacted === true || sha256(entryHashText(entry.salt, entry.bodyText)) === entry.hash) &&
         known.has(leafOf(scheme, entry)),
@@ -112,7 +139,7 @@ export function leavesOf({ leaves, entries }: Pick<SealedVersion, 'leaves' | 'en
   return leaves ?? entries.map(({ hash }) => hash);
 }
 
-function leafOf(scheme: HashScheme, { rank, hash }: SealedEntry): string {
+function leafOf(scheme: HashScheme, { rank, hash }: Pick<SealedEntry, 'rank' | 'hash'>): string {
   return scheme === 1 ? hash : sha256(leafText(rank ?? 0, hash));
 }
 

@@ -1,4 +1,5 @@
 import { wasPublished } from '#shared/calendar/version-state.js';
+import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { VersionEntry, VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import type { EntityManager } from 'typeorm';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
@@ -23,11 +24,12 @@ export async function seenOfVersion(
   header: VersionHeader,
   entries: readonly VersionEntry[],
 ): Promise<Seen<VersionEntry>> {
+  const seen = await withSeenVariants(manager, viewer, entries);
   const sight = await entrySight(manager, viewer, entries.map(thingOf));
   const fallen = wasPublished(version.state) ? await fallenIds(manager, version.id) : new Set<string>();
   return cutDown(
     header,
-    entries.filter(({ entryId }) => !fallen.has(entryId)),
+    seen.filter(({ entryId }) => !fallen.has(entryId)),
     sight,
   );
 }
@@ -39,7 +41,8 @@ export async function seenOfDraft(
   header: VersionHeader,
   entries: readonly VersionEntryBody[],
 ): Promise<Seen<VersionEntryBody>> {
-  return cutDown(header, entries, await entrySight(manager, viewer, entries.map(thingOf)));
+  const seen = await withSeenVariants(manager, viewer, entries);
+  return cutDown(header, seen, await entrySight(manager, viewer, entries.map(thingOf)));
 }
 
 export function thingOf({ entryId, content }: Pick<VersionEntryBody, 'entryId' | 'content'>): SeenThing {
@@ -53,7 +56,45 @@ export async function entriesForVillage<B extends VersionEntryBody>(
   entries: readonly B[],
 ): Promise<B[]> {
   const sight = await entrySight(manager, viewer, entries.map(thingOf));
-  return entries.filter((entry) => sight.isForVillage(thingOf(entry)));
+  return entries
+    .filter((entry) => sight.isForVillage(thingOf(entry)))
+    .map(({ variants, ...entry }) => {
+      const forBoard = variants?.filter((variant) => variant.forBoard) ?? [];
+      return (forBoard.length === 0 ? entry : { ...entry, variants: forBoard }) as B;
+    });
+}
+
+/** Contents of entries and of the variants beside them, as far as what they go by is asked. */
+export function contentsOf(bodies: readonly VersionEntryBody[]): EntryInput[] {
+  return bodies.flatMap(({ content, variants = [] }) => [
+    content,
+    ...variants.map(({ content: { lead } }) => ({ ...content, lead })),
+  ]);
+}
+
+/** Entries with those of their variants that the person sees; which of them the village's board may go by is said. */
+async function withSeenVariants<B extends VersionEntryBody>(
+  manager: EntityManager,
+  viewer: Viewer,
+  entries: readonly B[],
+): Promise<B[]> {
+  const things = entries.flatMap(({ variants = [] }) =>
+    variants.map(({ variantId, content }) => ({
+      entryId: variantId,
+      markerKey: markerKeyOfLead(content.lead),
+    })),
+  );
+  if (things.length === 0) return [...entries];
+  const sight = await entrySight(manager, viewer, things, 'variant');
+  const byId = new Map(things.map((thing) => [thing.entryId, thing]));
+  return entries.map(({ variants, ...entry }) => {
+    const seen = (variants ?? []).flatMap((variant) => {
+      const thing = byId.get(variant.variantId);
+      if (thing === undefined || sight.appearance(thing) !== 'full') return [];
+      return [{ ...variant, forBoard: sight.isForVillage(thing) }];
+    });
+    return (seen.length === 0 ? entry : { ...entry, variants: seen }) as B;
+  });
 }
 
 /** Also leaves out of the header what only unseen entries go by; positions are counted anew, so that no gap shows. */
@@ -61,7 +102,7 @@ export function cutHeader(
   header: VersionHeader,
   shown: readonly VersionEntryBody[],
 ): { header: VersionHeader; complete: boolean } {
-  const contents = shown.map(({ content }) => content);
+  const contents = contentsOf(shown);
   const keys = new Set(markerKeysOf(contents));
   const markers = header.markers.filter(({ markerKey }) => keys.has(markerKey));
   const place = withUsedFigures(header.place, contents);

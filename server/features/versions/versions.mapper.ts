@@ -4,8 +4,11 @@ import type {
   VersionEntryBody,
   VersionHeader,
   VersionSummary,
+  VersionVariant,
 } from '#shared/contracts/versions.js';
+import type { FrozenVariant } from '#shared/contracts/variants.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import type { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import type { SignatureEntity } from '../../db/entities/signature.entity.js';
 import type { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 
@@ -26,6 +29,13 @@ export function toVersionEntry(row: VersionEntryEntity): VersionEntry {
     rank: row.rank,
     redacted: row.redacted,
   };
+}
+
+/** Whether the village's board may go by it is for the policy to say. */
+export function toVersionVariant(row: VersionVariantEntity): VersionVariant {
+  const { variantId, content, dates } = JSON.parse(row.bodyText) as FrozenVariant;
+  const { salt, hash, rank, redacted } = row;
+  return { variantId, content, dates, forBoard: false, salt, hash, rank, redacted };
 }
 
 export function toSummary(

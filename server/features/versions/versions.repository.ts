@@ -2,6 +2,7 @@ import type { EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { SignatureEntity } from '../../db/entities/signature.entity.js';
 import type { SeenThing } from '../../policy/entry-sight.js';
+import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 
 export async function findVersion(
@@ -17,6 +18,13 @@ export async function frozenEntries(
   versionId: string,
 ): Promise<VersionEntryEntity[]> {
   return manager.find(VersionEntryEntity, { where: { versionId }, order: { position: 'ASC' } });
+}
+
+export async function frozenVariants(
+  manager: EntityManager,
+  versionId: string,
+): Promise<VersionVariantEntity[]> {
+  return manager.find(VersionVariantEntity, { where: { versionId }, order: { position: 'ASC' } });
 }
 
 export async function signaturesOf(manager: EntityManager, versionId: string): Promise<SignatureEntity[]> {

@@ -1,5 +1,6 @@
 import type { SharedItemType } from '#shared/contracts/sharing.js';
 import type { EntityManager } from 'typeorm';
+import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { KeptReadEntity } from '../../db/entities/kept-read.entity.js';
 import type { Clock } from '../../http/context.js';
@@ -11,7 +12,12 @@ import {
 import type { AttachmentFilesService } from '../attachments/attachment-files.service.js';
 import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
-import { eraseFrozenEntry, eraseFrozenFigure } from '../versions/frozen-eraser.service.js';
+import {
+  eraseFrozenEntry,
+  eraseFrozenFigure,
+  eraseFrozenVariant,
+  variantIdsOf,
+} from '../versions/frozen-eraser.service.js';
 import type { Erased, Eraser } from './eraser.service.js';
 
 /** The erasers of the parts that there are. A new part that keeps what people gave adds its own. */
@@ -28,9 +34,16 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
         'answer',
         answers.map(({ id }) => id),
       );
+      const variants = await variantIdsOf(manager, itemId);
       const published = await eraseFrozenEntry(manager, itemId, leavesTrace);
       await eraseDraftEntry(manager, itemId);
-      return { ...attached(spoken), published };
+      const { withIt = [], ...rest } = attached(spoken);
+      const beside = variants.map((id) => ({ itemType: 'variant' as const, itemId: id }));
+      return { ...rest, published, withIt: [...withIt, ...beside] };
+    }),
+    only('variant', async (manager, { itemId }) => {
+      await manager.delete(EntryVariantEntity, { id: itemId });
+      return { published: await eraseFrozenVariant(manager, itemId) };
     }),
     async (manager, { itemType, itemId }) =>
       itemType === 'entry' || itemType === 'figure'

@@ -133,6 +133,9 @@ export const texts = {
       'azimuth-difference': 'rule by direction (after Vogt 1920)',
     },
     skyline: { hills: 'this skyline', flat: 'flat horizon' },
+    safeDays: '{{title}} (the safe days of all who count it)',
+    ownDays: '{{title}} – as {{giver}} counts',
+    otherDays: '{{title}} – as {{giver}} counts',
     noDate: {
       'never-sets': 'the star never sets here, so it has no first or last day.',
       'never-clears-skyline': 'the star never clears the skyline here.',

@@ -53,6 +53,7 @@ export const texts = {
     'not-of-the-group': 'Only a group’s own people say who belongs to it. Ask one of them.',
     'nothing-asked': 'No wider sharing is asked for here any more. Load the page again.',
     'giver-and-steward': 'A wider circle is for the giver and the steward together to allow.',
+    'too-many-variants': 'There are as many variants as an entry can have.',
     'not-paused': 'This is not paused. Load the page again.',
     'pause-over': 'The pause has lasted more than thirty days. Only its giver can end it now.',
     'not-yourself': 'Nobody makes themselves an elder. Ask another steward or the elders.',

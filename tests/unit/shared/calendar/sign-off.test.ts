@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import {
   answeredCount,
+  entryOutcome,
   signingObstacle,
   signOffGaps,
   type AnswerFact,
@@ -190,5 +191,31 @@ describe('an elder’s progress', () => {
     ];
     expect(answeredCount('e1', entries, answers)).toBe(1);
     expect(answeredCount('e3', entries, answers)).toBe(0);
+  });
+});
+
+describe('where an entry stands', () => {
+  const entry = { entryId: 'e', hash: 'h' };
+  const said = (elderId: string, answer: AnswerFact['answer'], letStand = false): AnswerFact => ({
+    ...{ entryId: 'e', entryHash: 'h', elderId, answer, letStand },
+  });
+  const outcome = (answers: AnswerFact[], hasVariants = false) =>
+    entryOutcome(entry, answers, new Set(['writer']), hasVariants);
+
+  it('is agreed by one who did not write it, and by nobody’s silence', () => {
+    expect(outcome([])).toBe('with-reviewers');
+    expect(outcome([said('writer', 'agree')])).toBe('with-reviewers');
+    expect(outcome([said('a', 'agree')])).toBe('agreed');
+  });
+
+  it('is agreed with differences, a full outcome, where one is let stand or a variant stands beside it', () => {
+    expect(outcome([said('a', 'agree'), said('b', 'change-this', true)])).toBe('agreed-with-differences');
+    expect(outcome([said('a', 'agree')], true)).toBe('agreed-with-differences');
+  });
+
+  it('is held back or open to change as long as one person says so, however many agree', () => {
+    const agreed = ['a', 'b', 'c', 'd'].map((elder) => said(elder, 'agree'));
+    expect(outcome([...agreed, said('e', 'change-this')])).toBe('changes-asked');
+    expect(outcome([...agreed, said('e', 'not-for-the-board')])).toBe('held-back');
   });
 });
