@@ -143,7 +143,8 @@ export function entryOutcome(
   if (given.some(({ answer }) => answer === 'not-for-the-board')) return 'held-back';
   const asked = given.filter(({ answer }) => answer === 'change-this');
   if (asked.some(({ letStand }) => !letStand)) return 'changes-asked';
-  if (!given.some(({ answer, elderId }) => answer === 'agree' && !writerIds.has(elderId))) return 'with-reviewers';
+  if (!given.some(({ answer, elderId }) => answer === 'agree' && !writerIds.has(elderId)))
+    return 'with-reviewers';
   return asked.length > 0 || hasVariants ? 'agreed-with-differences' : 'agreed';
 }
 
