@@ -17,6 +17,9 @@ import { calendarsRoutes } from './features/calendars/calendars.routes.js';
 import { CalendarsService } from './features/calendars/calendars.service.js';
 import { EntriesService } from './features/calendars/entries.service.js';
 import { SkyDatesService } from './features/calendars/sky-dates.service.js';
+import { ConsentCardService } from './features/consents/consent-card.service.js';
+import { consentsRoutes } from './features/consents/consents.routes.js';
+import { ConsentsService } from './features/consents/consents.service.js';
 import { driftRoutes } from './features/drift/drift.routes.js';
 import { DriftService } from './features/drift/drift.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
@@ -199,9 +202,10 @@ export function createApp(options: AppOptions): App {
     new AttachmentWordsService(dataSource, clock),
   );
   sheetsRoutes(mount, new SheetsService(contents, versions, clock));
+  const consents = new ConsentsService(dataSource, clock);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers);
-  todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, clock }));
+  todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, consents, clock }));
   const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
@@ -209,6 +213,7 @@ export function createApp(options: AppOptions): App {
   const erasers = erasersOf(attachmentFiles, clock);
   withdrawalsRoutes(mount, new WithdrawalsService(dataSource, clock, erasers, options.withdrawals));
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
+  consentsRoutes(mount, consents, new ConsentCardService(dataSource, consents));
   auditRoutes(mount, new AuditListService(dataSource, clock));
 
   app.use(router);

@@ -10,6 +10,8 @@ export interface Shared {
   giverId: string | null;
   state: SharingState;
   leavesTrace: boolean;
+  /** The last day on which what was agreed lets it be shown; nothing where no consent says so. */
+  shownUntil?: string | null;
 }
 
 /** Seen whole; seen as an empty slot; not there. */
@@ -23,6 +25,8 @@ export type Appearance = 'full' | 'blank' | 'none';
 export function appearance(viewer: Viewer, shared: Shared | undefined): Appearance {
   if (shared?.communityId !== viewer.communityId) return 'none';
   if (shared.state !== 'shared') return 'none';
+  // The giver alone still sees what their consent hides: they are to know what they are asked about again.
+  if (!isAgreedToShow(shared, viewer.today)) return shared.giverId === viewer.personId ? 'full' : 'none';
   if (isTold(viewer, shared)) return 'full';
   return effectiveLevel(shared, viewer.today) === 'sealed' ? 'none' : shared.details.trace;
 }
@@ -31,9 +35,14 @@ export function maySee(viewer: Viewer, shared: Shared | undefined): boolean {
   return appearance(viewer, shared) === 'full';
 }
 
+/** Who reads what was agreed about a thing: those who may see it by its level, also while its consent hides it. */
+export function maySeeByLevel(viewer: Viewer, shared: Shared | undefined): boolean {
+  return shared !== undefined && maySee(viewer, { ...shared, shownUntil: null });
+}
+
 /** Open and the village's: what goes on the village's board, into its counts and its sign-off. */
 export function isForVillage(shared: Shared | undefined, today: string): boolean {
-  if (shared?.state !== 'shared') return false;
+  if (shared?.state !== 'shared' || !isAgreedToShow(shared, today)) return false;
   const level = effectiveLevel(shared, today);
   return level === 'open' || level === 'village';
 }
@@ -49,6 +58,10 @@ export function effectiveLevel(
 /** Narrower than the village at some time of the year: such things are answered by their own people. */
 export function isKept({ level, details }: Pick<Shared, 'level' | 'details'>): boolean {
   return details.tellingSeason !== null || (level !== 'open' && level !== 'village');
+}
+
+function isAgreedToShow({ shownUntil = null }: Shared, today: string): boolean {
+  return shownUntil === null || today <= shownUntil;
 }
 
 function isTold(viewer: Viewer, { level, details, giverId, ...shared }: Shared): boolean {

@@ -1,6 +1,7 @@
 import type { SharedItemType, SharingDetails, SharingLevel } from '#shared/contracts/sharing.js';
 import { In, type EntityManager } from 'typeorm';
 import { ItemSharingEntity } from '../db/entities/item-sharing.entity.js';
+import { copyConsents } from './consent.repository.js';
 import type { Shared } from './policy.js';
 
 /** What the policy knows about things of one kind, by id. */
@@ -52,4 +53,5 @@ export async function copySharing(
     itemId: fromId,
   });
   await insertSharing(manager, { itemType, itemId, communityId, level, details, giverId });
+  if (itemType === 'entry') await copyConsents(manager, itemType, fromId, itemId);
 }

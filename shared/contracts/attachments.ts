@@ -20,7 +20,7 @@ export const ATTACHMENT_KINDS = ['recording', 'picture'] as const;
 export type AttachmentKind = (typeof ATTACHMENT_KINDS)[number];
 
 /** What a recording or a picture belongs to. It is never shown to anybody who may not see that. */
-export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker'] as const;
+export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker', 'consent'] as const;
 export type AttachmentSubjectType = (typeof ATTACHMENT_SUBJECTS)[number];
 
 export const ATTACHMENT_LEVELS = ['village', 'elders'] as const;

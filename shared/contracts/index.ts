@@ -3,6 +3,7 @@ import { airEndpoints } from './air.js';
 import { attachmentsEndpoints } from './attachments.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
+import { consentsEndpoints } from './consents.js';
 import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { figuresEndpoints } from './figures.js';
@@ -45,6 +46,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   sheetsEndpoints,
   sharingEndpoints,
   withdrawalsEndpoints,
+  consentsEndpoints,
   auditEndpoints,
   todayEndpoints,
   lookEndpoints,

@@ -86,6 +86,8 @@ export const today = z.strictObject({
   comingSigns: z.array(comingSign),
   openWindows: z.array(openWindow),
   waiting: z.array(waitingItem),
+  /** Consents that this person is to ask for again, or is asked about again; without what they are about. */
+  consentsDue: z.number().int(),
 });
 export type Today = z.infer<typeof today>;
 

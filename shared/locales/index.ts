@@ -3,6 +3,7 @@ import { texts as attachments } from './en/attachments.js';
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
 import { texts as common } from './en/common.js';
+import { texts as consents } from './en/consents.js';
 import { texts as drift } from './en/drift.js';
 import { texts as figures } from './en/figures.js';
 import { texts as files } from './en/files.js';
@@ -44,6 +45,7 @@ export const en = {
   calendars,
   reviews,
   sharing,
+  consents,
   sheets,
   attachments,
   audit,

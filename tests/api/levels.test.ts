@@ -130,7 +130,7 @@ describe('a telling season', () => {
 });
 
 /** Where a thing of each person is to be found. */
-const SHOWING = new Set(['listEntries', 'readVersion', 'listFigures', 'listAnswers']);
+const SHOWING = new Set(['listEntries', 'readVersion', 'listFigures', 'listAnswers', 'readConsent']);
 
 function plantedIn(where: string): Planted {
   const found = village.planted.find((one) => one.where === where);

@@ -22,6 +22,7 @@ import {
   says,
   submit,
 } from '#tests/support/calendar-api.js';
+import { addConsent, asked } from '#tests/support/consent-api.js';
 import { addPicture, attachmentInput } from '#tests/support/attachment-api.js';
 import { addFigure, figureInput } from '#tests/support/figure-api.js';
 import { plainPicture } from '#tests/support/media.js';
@@ -46,6 +47,8 @@ interface Village {
   groupId: string;
   variantId: string;
   withdrawalId: string;
+  /** One about each who calls, for it is theirs to read; visitors ask for the officer's. */
+  consentIds: Readonly<Record<Role, string>>;
   elderId: string;
   /** A published version, which everybody of the village sees, and one that is in review. */
   publishedNumber: number;
@@ -109,7 +112,7 @@ function expectedVerdicts({ access }: Endpoint): Record<string, Verdict> {
 
 async function call(endpoint: Endpoint, role: Role | null, village: Village): Promise<Verdict> {
   const client = await clientFor(endpoint, role);
-  const path = fillPath(endpoint.path, paramsOf(endpoint, village)) + queryOf(endpoint, village);
+  const path = fillPath(endpoint.path, paramsOf(endpoint, role, village)) + queryOf(endpoint, village);
   const body = endpoint.body === undefined ? undefined : bodyOf(endpoint, role, village);
   const answer = await {
     GET: () => client.get(path),
@@ -132,7 +135,7 @@ async function clientFor({ access }: Endpoint, role: Role | null): Promise<Clien
   return access.kind === 'public' ? api.signIn(role) : clients[role];
 }
 
-function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> {
+function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Record<string, string> {
   const reviewed = new Set([
     'askChanges',
     'publishVersion',
@@ -154,6 +157,7 @@ function paramsOf(endpoint: Endpoint, village: Village): Record<string, string> 
     groupId: village.groupId,
     variantId: village.variantId,
     withdrawalId: village.withdrawalId,
+    consentId: village.consentIds[role ?? 'officer'],
     itemType: 'entry',
     itemId: village.entryId,
     markerKey: 'pleiades',
@@ -242,6 +246,9 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     // Nobody of these gave it or is asked for it: the thing stays.
     withdrawItem: () => ({ leavesTrace: true, askedById: village.place.id }),
     pauseItem: () => ({ askedById: village.place.id }),
+    addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
+    changeConsent: () => ({ content: asked(), ...stale }),
+    withdrawConsent: () => stale,
     changeSharing: () => ({ sharing: { level: 'village', ...PLAIN_DETAILS }, ...stale }),
     reorderEntries: () => ({ entryIds: [village.entryId] }),
     askChanges: () => ({ reason: 'taken-back', note: '' }),
@@ -279,6 +286,7 @@ async function furnishOwn(): Promise<Village> {
     withdrawalId: await aWithdrawal(village.officer.communityId),
     variantId,
     groupId: (await addGroup(village.steward, 'Weavers', [village.elder])).id,
+    consentIds: await consentsOf(village.officer, entry.id, clients),
     elderId: village.elder.personId,
     publishedNumber: published.number,
     reviewedNumber: reviewed.number,
@@ -304,6 +312,7 @@ async function furnishOther(): Promise<Village> {
     withdrawalId: await aWithdrawal(home.community.id),
     variantId,
     groupId: await firstGroup(home.community.id),
+    consentIds: await consentsOf(officer, entry.id, {}),
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,
@@ -318,6 +327,22 @@ async function aWithdrawal(communityId: string): Promise<string> {
     ...{ askedBy: null, doneBy: null, published: [], sheetsReplacedAt: null },
   });
   return id;
+}
+
+/** A consent about an entry for the person of each role; the same one for all where they are not of the village. */
+async function consentsOf(
+  officer: Client,
+  entryId: string,
+  givers: Partial<Record<Role, Client>>,
+): Promise<Record<Role, string>> {
+  const ids: Partial<Record<Role, string>> = {};
+  const { id: first } = await addConsent(officer, 'entry', entryId, asked());
+  for (const role of ROLES) {
+    const giverId = givers[role]?.personId;
+    ids[role] =
+      giverId === undefined ? first : (await addConsent(officer, 'entry', entryId, asked({ giverId }))).id;
+  }
+  return { steward: first, officer: first, elder: first, staff: first, observer: first, ...ids };
 }
 
 /** Groups are founded by stewards and elders, who cannot sign in there. */

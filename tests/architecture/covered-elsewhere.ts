@@ -3,6 +3,7 @@
  * more about them than a test of their own would.
  */
 export const coveredElsewhere: Readonly<Record<string, string>> = {
+  'shared/contracts/consents.ts': 'tests/api/consents.test.ts',
   'shared/contracts/sharing.ts': 'tests/api/sharing.test.ts',
   'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import type { ConsentContent } from '#shared/contracts/consents.js';
 import type { FigureInput } from '#shared/contracts/figures.js';
 import { PLAIN_DETAILS, SHARED_ITEM_TYPES, type SharingChange } from '#shared/contracts/sharing.js';
 import type { Client, TestApi } from './api.js';
@@ -17,6 +18,7 @@ import {
 } from './calendar-api.js';
 import type { Variant, VariantInput } from '#shared/contracts/variants.js';
 import { variantInput } from './variant-api.js';
+import { addConsent } from './consent-api.js';
 import { addFigure, figureInput } from './figure-api.js';
 import { addGroup, details } from './sharing-api.js';
 
@@ -173,6 +175,24 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       says({ answer: 'change-this', note: word }),
     );
   }
+  const consents = [
+    await addConsent(officer, 'entry', open.id, {
+      ...agreed(plant('consent on the open entry', OFFICE)),
+      uses: ['keep', 'show', 'print'],
+    }),
+    await addConsent(elder, 'figure', figures.elders.id, {
+      ...agreed(plant('consent on the elders figure', ['giver', 'heir', 'weaver'])),
+      giverId: elder.personId,
+    }),
+  ];
+  for (const entry of kept) {
+    const { sharingLevel } = entry.content;
+    const word = plant(`consent on ${sharingLevel} ${kept.indexOf(entry)}`, [
+      'giver',
+      ...answerers(entry.content),
+    ]);
+    consents.push(await addConsent(elder, 'entry', entry.id, { ...agreed(word), giverId: elder.personId }));
+  }
   const numbers = [String(published.number), String(reviewed.number)];
   const [sealed] = kept.slice(2);
   return {
@@ -198,6 +218,7 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       itemId: [...kept, ...Object.values(figures)].map(({ id }) => id),
       groupId: [group.id],
       variantId: variants.map(({ variantId }) => variantId),
+      consentId: consents.map(({ id }) => id),
       attachmentId: [randomUUID()],
       withdrawalId: [randomUUID()],
       part: ['0', '1'],
@@ -225,6 +246,11 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       ),
     },
   };
+}
+
+/** The words that somebody gives with their yes. */
+function agreed(word: string): Partial<ConsentContent> {
+  return { giverName: word, spokeFor: word, conditions: word, benefits: word, explainedBy: word };
 }
 
 /** Who reads what an elder said about an entry: its own people who see reviews. */

@@ -6,6 +6,7 @@ import { AuditEventEntity } from './audit-event.entity.js';
 import { CalendarVersionEntity } from './calendar-version.entity.js';
 import { CalendarEntity } from './calendar.entity.js';
 import { CommunityEntity } from './community.entity.js';
+import { ConsentEntity } from './consent.entity.js';
 import { DraftContributionEntity } from './draft-contribution.entity.js';
 import { EntryEntity } from './entry.entity.js';
 import { FigureEntity } from './figure.entity.js';
@@ -55,4 +56,5 @@ export const ENTITIES = [
   WithdrawalEntity,
   EntryVariantEntity,
   VersionVariantEntity,
+  ConsentEntity,
 ];

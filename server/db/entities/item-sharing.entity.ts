@@ -65,6 +65,10 @@ export class ItemSharingEntity {
   @Column({ name: 'leaves_trace', type: 'boolean', default: false })
   leavesTrace!: boolean;
 
+  /** The last day on which what was agreed lets it be shown; null where no consent says so. */
+  @Column({ name: 'shown_until', type: 'date', nullable: true })
+  shownUntil!: string | null;
+
   @VersionColumn({ type: 'int' })
   version!: number;
 }

@@ -4,6 +4,8 @@ import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { recordingsMayBeOpened } from '../../policy/consent-gate.js';
+import { villageDay } from '../../policy/viewer.js';
 import { FileNotStored, type ByteRange, type FileStore } from '../../storage/file-store.js';
 import { mayHearConsent } from './attachment-access.service.js';
 import { recordAttachment } from './attachment-audit.js';
@@ -43,6 +45,8 @@ export class AttachmentReadingService {
     const row = await readable(this.dataSource.manager, actor, attachmentId);
     const part = row.parts.find((each) => each.part === number);
     if (part === undefined || (number === 0 && !mayHearConsent(actor, row))) throw notFound();
+    // The spoken consent is proof of what was said, so it does not wait for what was said.
+    if (number > 0) await this.expectMayBeOpened(actor, row);
     if (fromBeginning) await this.writeDown(actor, row);
     const { storageKey, bytes, contentType, sha256 } = part;
     const fileName = `${row.title || row.kind}-${number}.${ENDINGS[contentType] ?? 'bin'}`;
@@ -51,6 +55,7 @@ export class AttachmentReadingService {
 
   async thumbnail(actor: Actor, attachmentId: string): Promise<OpenedFile> {
     const row = await readable(this.dataSource.manager, actor, attachmentId);
+    await this.expectMayBeOpened(actor, row);
     const part = row.parts.find(({ thumbnailKey }) => thumbnailKey !== null);
     const key = part?.thumbnailKey ?? null;
     const facts = key === null ? null : await this.store.stat(key);
@@ -62,6 +67,14 @@ export class AttachmentReadingService {
       tag: `${part.sha256}-small`,
       open: (range) => this.open(key, range),
     };
+  }
+
+  /** Where the giver shares only what was said, the voice or the picture itself is there for its sender alone. */
+  private async expectMayBeOpened(actor: Actor, row: AttachmentEntity): Promise<void> {
+    const { manager } = this.dataSource;
+    if (row.addedBy === actor.person.id) return;
+    const today = await villageDay(manager, row.communityId, this.clock.now());
+    if (!(await recordingsMayBeOpened(manager, today, row))) throw notFound();
   }
 
   private async open(key: string, range?: ByteRange): Promise<Readable> {

@@ -6,6 +6,7 @@ import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
+import { readableConsent } from '../consents/readable-consent.service.js';
 import { everyVillageFigure } from '../figures/village-figures.service.js';
 
 type Look = (manager: EntityManager, actor: Actor, id: string) => Promise<boolean>;
@@ -33,6 +34,8 @@ const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
     (await manager.existsBy(AnswerEntity, { id, calendar: { communityId: actor.communityId } })),
   marker: async (manager, { communityId }, key) =>
     resolveMarker(key, await everyVillageFigure(manager, communityId)) !== null,
+  /** Proof of a consent is for those who read the consent. */
+  consent: async (manager, actor, id) => readableConsent(manager, actor, id, new Date()),
 };
 
 export async function maySeeSubject(

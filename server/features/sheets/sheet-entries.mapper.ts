@@ -6,11 +6,6 @@ import type { Translate } from '../../print/translator.js';
 import { boardOf } from '../versions/board.service.js';
 import { whyNoDate } from './why-no-date.js';
 
-/** A belief is printed only where its giver was asked and agreed; everything else of a calendar is for the wall. */
-export function mayBePrinted({ kind, agreedToPrint }: EntryInput): boolean {
-  return kind !== 'belief' || agreedToPrint;
-}
-
 export interface EntryTexts {
   files: Translate;
   sky: Translate;

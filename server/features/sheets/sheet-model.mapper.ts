@@ -7,7 +7,7 @@ import { civilDayOf, moonPhases, moonsBetween } from '#shared/sky/index.js';
 import { sheetWords } from '../../print/sheet-words.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
-import { mayBePrinted, toSheetEntries } from './sheet-entries.mapper.js';
+import { toSheetEntries } from './sheet-entries.mapper.js';
 import { toSheetMarkers } from './sheet-markers.mapper.js';
 
 /** No month from crescent to crescent is longer. */
@@ -15,6 +15,7 @@ const LONGEST_MONTH_DAYS = 32;
 
 export interface SheetFacts {
   header: VersionHeader;
+  /** Those that may be printed. */
   entries: readonly VersionEntryBody[];
   /** Null for the draft. */
   state: VersionState | null;
@@ -34,7 +35,6 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
   const print = translatorFor(language, 'print');
   const sky = translatorFor(language, 'sky');
   const words = sheetWords({ translate: print, language, year });
-  const printed = facts.entries.filter(({ content }) => mayBePrinted(content));
   return {
     layout,
     paper,
@@ -46,8 +46,8 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     stateWatermark: state === 'published' ? null : print(`state.${state ?? 'draft'}`),
     officerLanguage: language,
     villageLanguage: header.villageLanguage.tag,
-    markers: toSheetMarkers(printed, header.markers, year, { files, sky }),
-    entries: toSheetEntries(printed, year, { files, sky, words }),
+    markers: toSheetMarkers(facts.entries, header.markers, year, { files, sky }),
+    entries: toSheetEntries(facts.entries, year, { files, sky, words }),
     moon: moonOf(header),
     moonBegins: moonBeginsOf(header),
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },

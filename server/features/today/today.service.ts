@@ -7,6 +7,7 @@ import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import type { CalendarsService } from '../calendars/calendars.service.js';
+import type { ConsentsService } from '../consents/consents.service.js';
 import { civilDateAt } from '../places/place-day.service.js';
 import type { PlacesService } from '../places/places.service.js';
 import { boardOf } from '../versions/board.service.js';
@@ -21,6 +22,7 @@ export interface TodayParts {
   contents: FrozenContentService;
   coming: ComingMarkersService;
   waiting: WaitingService;
+  consents: ConsentsService;
   clock: Clock;
 }
 
@@ -54,6 +56,7 @@ export class TodayService {
       comingSigns: comingSigns(published, date),
       openWindows: published.flatMap((calendar) => openWindows(calendar, date)).sort(byLastDay),
       waiting: await waiting.of(actor, all, year),
+      consentsDue: await this.parts.consents.countDue(actor),
     };
   }
 

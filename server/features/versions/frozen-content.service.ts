@@ -20,6 +20,7 @@ import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { draftVariants } from '../variants/draft-variants.service.js';
 import { readDraft } from '../calendars/draft.service.js';
 import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
+import { entriesForUse } from '../../policy/consent-gate.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { checkSeal, leavesOf, newSalt } from './seal.service.js';
 import {
@@ -73,12 +74,13 @@ export class FrozenContentService {
     return { header, entries: entries.map(bodyOf), number: version.number, label, state, hash };
   }
 
-  /** For the village's board: open and the village's entries, the same for whoever prints it. */
+  /** For the village's board: open and the village's entries that were agreed to be printed, whoever prints it. */
   async readForBoard(actor: Actor, calendarId: string, number: string): Promise<CalendarContent> {
     const { manager } = this.dataSource;
     const content = await this.read(actor, calendarId, number);
     const viewer = await viewerOf(manager, actor, this.clock.now());
-    const entries = await entriesForVillage(manager, viewer, content.entries);
+    const shown = await entriesForVillage(manager, viewer, content.entries);
+    const entries = await entriesForUse(manager, viewer.today, 'print', shown);
     return { ...content, header: cutHeader(content.header, entries).header, entries };
   }
 

@@ -11,6 +11,7 @@ import {
 } from '../attachments/attachment-eraser.service.js';
 import type { AttachmentFilesService } from '../attachments/attachment-files.service.js';
 import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.service.js';
+import { eraseConsents } from '../consents/consent-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
 import {
   eraseFrozenEntry,
@@ -62,6 +63,10 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       return {};
     }),
     only('attachment', async (manager, { itemId }) => attached(await eraseAttachments(manager, [itemId]))),
+    async (manager, { itemType, itemId }) => {
+      const consentIds = await eraseConsents(manager, itemType, itemId);
+      return attached(await eraseAttachmentsOf(manager, 'consent', consentIds));
+    },
     async (manager, { itemId }) => {
       await manager.delete(KeptReadEntity, { itemId });
       return {};

@@ -28,6 +28,7 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
     by: asText(details['by']),
     reason:
       details['reason'] === 'elder-asked' ? t('audit:reason.elder-asked') : t('audit:reason.taken-back'),
+    state: isConsentState(details['state']) ? t(`audit:consent.${details['state']}`) : '',
     answer: isAnswer(details['answer']) ? t(`audit:answer.${details['answer']}`) : '',
   });
 }
@@ -50,6 +51,10 @@ function asField(field: string): Field {
 
 function isLevel(value: unknown): value is SharingLevel {
   return SHARING_LEVELS.some((level) => level === value);
+}
+
+function isConsentState(value: unknown): value is keyof typeof texts.consent {
+  return typeof value === 'string' && value in texts.consent;
 }
 
 function isAnswer(value: unknown): value is keyof typeof texts.answer {

@@ -103,31 +103,7 @@ const single = (date: string): Partial<EntryDates> => ({
   window: { earliest: date, bestFrom: date, bestTo: date, lastAdvised: date, lastAdvisedBy: 'offset' },
 });
 
-describe('what may be printed', () => {
-  it('leaves a belief out that was not agreed to print, its marker and its number with it', () => {
-    const sheet = model([
-      body({ titleOfficer: 'First' }),
-      body({
-        titleOfficer: 'Secret',
-        kind: 'belief',
-        lead: goesBy('hr7001', 'heliacal-rising'),
-        agreedToPrint: false,
-      }),
-      body({ titleOfficer: 'Second' }),
-    ]);
-    expect(sheet.entries.map(({ number, titles }) => [number, titles.officer])).toEqual([
-      [1, 'First'],
-      [2, 'Second'],
-    ]);
-    expect(sheet.markers.map(({ key }) => key)).toEqual(['pleiades']);
-    expect(JSON.stringify({ ...sheet, words: null })).not.toContain('Secret');
-  });
-
-  it('prints a belief whose giver agreed', () => {
-    const sheet = model([body({ kind: 'belief', agreedToPrint: true })]);
-    expect(sheet.entries).toHaveLength(1);
-  });
-
+describe('what stands across the sheet', () => {
   it.each([
     ['draft', null, 'Draft'],
     ['a submission in review', 'in-review', 'In review'],

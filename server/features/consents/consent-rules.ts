@@ -1,0 +1,77 @@
+import type { ConsentContent, ConsentLine } from '#shared/contracts/consents.js';
+import type { EntityManager } from 'typeorm';
+import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
+import type { ConsentEntity } from '../../db/entities/consent.entity.js';
+import { MembershipEntity } from '../../db/entities/membership.entity.js';
+import { hasRole, type Actor } from '../../http/actor.js';
+import { conflict, invalidField } from '../../http/app-error.js';
+import { isOpen } from '../../policy/consents.js';
+import type { ConsentThing } from './consent-things.service.js';
+
+/** The giver, whoever gave the thing itself, and those who compile, review and sign, of what they see. */
+export function mayOf(
+  actor: Actor,
+  row: Pick<ConsentEntity, 'giverId' | 'state'>,
+  thing: ConsentThing,
+): ConsentLine['may'] {
+  const read = isGiver(actor, row, thing) || (thing.isSeen && keeps(actor));
+  const isYes = row.state === 'given' || row.state === 'given-with-conditions';
+  // Taking back is as easy as giving: the steward does it without reading what it is about.
+  return { read, change: read, withdraw: isYes && (read || hasRole(actor, 'steward')) };
+}
+
+export function mayAsk(actor: Actor, thing: ConsentThing): boolean {
+  return thing.shared.giverId === actor.person.id || (thing.isSeen && keeps(actor));
+}
+
+function keeps(actor: Actor): boolean {
+  return hasRole(actor, 'officer', 'steward', 'elder');
+}
+
+function isGiver(actor: Actor, { giverId }: Pick<ConsentEntity, 'giverId'>, { shared }: ConsentThing) {
+  return giverId === actor.person.id || shared.giverId === actor.person.id;
+}
+
+/** What was answered once is not asked as if for the first time: until a new yes it stays as it is. */
+export function expectAnswerFollows(before: ConsentEntity['state'], { answer }: ConsentContent): void {
+  if (isOpen(answer) && !isOpen(before)) throw invalidField('content.answer', 'answered-before');
+}
+
+/**
+ * A yes has its proof; the givers' own is that they said it themselves, signed in. Nobody says "own word" for somebody
+ * else. A no needs none.
+ */
+export function withProof(actor: Actor, content: ConsentContent, prefix: string): ConsentContent {
+  const { proof, giverId } = content;
+  const isOwn = giverId === actor.person.id;
+  if (proof?.kind === 'own-word' && !isOwn) throw invalidField(`${prefix}proof.kind`, 'own-word-of-giver');
+  if (isOwn && proof === null) {
+    return { ...content, proof: { kind: 'own-word', witness: '', attachmentId: null } };
+  }
+  if (content.uses.length > 0 && proof === null) throw invalidField(`${prefix}proof`, 'proof-required');
+  return content;
+}
+
+/** Givers are of this village; a voice or a picture that proves a consent belongs to that consent. */
+export async function expectKnown(
+  manager: EntityManager,
+  { communityId }: Actor,
+  { giverId, proof }: ConsentContent,
+  consentId: string,
+  prefix: string,
+): Promise<void> {
+  if (giverId !== null && !(await manager.existsBy(MembershipEntity, { communityId, personId: giverId }))) {
+    throw invalidField(`${prefix}giverId`, 'not-of-this-village');
+  }
+  const attachmentId = proof?.attachmentId ?? null;
+  if (attachmentId === null) return;
+  const belongs = { id: attachmentId, communityId, subjectType: 'consent' as const, subjectId: consentId };
+  if (!(await manager.existsBy(AttachmentEntity, belongs))) {
+    throw invalidField(`${prefix}proof.attachmentId`, 'unknown');
+  }
+}
+
+/** Who changes a consent of somebody else does it for them; staff and observers only for themselves. */
+export function expectMayAsk(actor: Actor, thing: ConsentThing): void {
+  if (!mayAsk(actor, thing)) throw conflict('not-the-giver');
+}

@@ -1,0 +1,66 @@
+import type { ConsentItemType } from '#shared/contracts/consents.js';
+import { In, type EntityManager } from 'typeorm';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { FigureEntity } from '../../db/entities/figure.entity.js';
+import { figureIdOf } from '../../policy/entry-sight.js';
+import { maySeeByLevel, type Shared } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import type { Viewer } from '../../policy/viewer.js';
+import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
+
+export interface ThingRef {
+  itemType: ConsentItemType;
+  itemId: string;
+}
+
+/** What a consent is about, for one person. */
+export interface ConsentThing {
+  shared: Shared;
+  /** By its level: a thing that only its consent hides is still known to those who ask for it again. */
+  isSeen: boolean;
+  /** Null where it is not theirs to see, or has no name. */
+  title: string | null;
+}
+
+export async function consentThings(
+  manager: EntityManager,
+  viewer: Viewer,
+  refs: readonly ThingRef[],
+): Promise<(ref: ThingRef) => ConsentThing | undefined> {
+  const idsOf = (type: ConsentItemType) =>
+    refs.filter(({ itemType }) => itemType === type).map(({ itemId }) => itemId);
+  const entries = new Map(
+    (await manager.findBy(EntryEntity, { id: In(idsOf('entry')) })).map((row) => [row.id, row.content]),
+  );
+  const ledBy = (entryId: string) => {
+    const content = entries.get(entryId);
+    return content === undefined ? null : figureIdOf(markerKeyOfLead(content.lead));
+  };
+  const figureIds = [
+    ...[...entries.keys()].flatMap((entryId) => ledBy(entryId) ?? []),
+    ...idsOf('figure'),
+    ...idsOf('story'),
+  ];
+  const names = new Map(
+    (await manager.findBy(FigureEntity, { id: In(figureIds) })).map(({ id, names: [first] }) => [
+      id,
+      first?.name ?? '',
+    ]),
+  );
+  const shared = {
+    entry: await sharedById(manager, 'entry', idsOf('entry')),
+    figure: await sharedById(manager, 'figure', figureIds),
+    story: await sharedById(manager, 'story', idsOf('story')),
+    attachment: await sharedById(manager, 'attachment', idsOf('attachment')),
+  };
+  return ({ itemType, itemId }) => {
+    const own = shared[itemType].get(itemId);
+    if (own?.communityId !== viewer.communityId) return undefined;
+    // An entry is never wider than the village's own figure that it goes by.
+    const figureId = itemType === 'entry' ? ledBy(itemId) : null;
+    const isSeen =
+      maySeeByLevel(viewer, own) && (figureId === null || maySeeByLevel(viewer, shared.figure.get(figureId)));
+    const title = itemType === 'entry' ? entries.get(itemId)?.titleOfficer : names.get(itemId);
+    return { shared: own, isSeen, title: isSeen ? (title ?? null) : null };
+  };
+}
