@@ -50,11 +50,16 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
   {
     path: PATTERNS.figure,
-    texts: ['figures', 'stars', 'sky', 'attachments'],
+    texts: ['figures', 'stars', 'sky', 'attachments', 'sharing'],
     load: () => import('./routes/figure.js'),
   },
   { path: PATTERNS.changeFigure, texts: ['figures'], load: () => import('./routes/figure-change.js') },
   { path: PATTERNS.villagePeople, texts: ['people'], load: () => import('./routes/village-people.js') },
+  {
+    path: PATTERNS.villageGroups,
+    texts: ['people', 'sharing'],
+    load: () => import('./routes/village-groups.js'),
+  },
   {
     path: PATTERNS.villageAsking,
     texts: ['people', 'letters'],
@@ -63,7 +68,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'sky', 'attachments'],
+    texts: ['calendars', 'versions', 'sky', 'attachments', 'sharing'],
     load: () => import('./routes/calendar.js'),
   },
   {

@@ -24,6 +24,7 @@ export const PATTERNS = {
   villageSettings: '/village/settings',
   villageRecords: '/village/records',
   villageAsking: '/village/asking',
+  villageGroups: '/village/groups',
   calendars: '/calendars',
   calendar: '/calendars/:calendarId',
   versions: '/calendars/:calendarId/versions',
@@ -94,6 +95,7 @@ export const paths = {
   villageSettings: () => PATTERNS.villageSettings,
   villageRecords: () => PATTERNS.villageRecords,
   villageAsking: () => PATTERNS.villageAsking,
+  villageGroups: () => PATTERNS.villageGroups,
   /** With a marker, the person chooses a calendar and a new entry then goes by it. */
   calendars: (query: MarkerQuery = {}) => withQuery(PATTERNS.calendars, { ...query }),
   calendar: (calendarId: string, query: { entry?: string } & MarkerQuery = {}) =>

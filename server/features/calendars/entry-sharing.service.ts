@@ -8,7 +8,7 @@ import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import { isKept, maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing } from '../../policy/sharing.repository.js';
-import { isTighterOrSame, type Sharing } from '../../policy/tightness.js';
+import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import type { Viewer } from '../../policy/viewer.js';
 
 /** How an entry is shared, as its content says it. */

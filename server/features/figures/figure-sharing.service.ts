@@ -7,7 +7,7 @@ import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
 import type { Actor } from '../../http/actor.js';
 import { invalidField, notFound } from '../../http/app-error.js';
 import { insertSharing, lockSharing } from '../../policy/sharing.repository.js';
-import { isTighterOrSame, type Sharing } from '../../policy/tightness.js';
+import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 
 type Levels = Pick<FigureInput, 'sharingLevel' | 'sharing' | 'storyLevel'>;
 

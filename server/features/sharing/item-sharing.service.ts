@@ -11,7 +11,7 @@ import { conflict, invalidField, notFound, stale } from '../../http/app-error.js
 import type { Clock } from '../../http/context.js';
 import { maySee } from '../../policy/policy.js';
 import { lockSharing } from '../../policy/sharing.repository.js';
-import { isTighterOrSame, type Sharing } from '../../policy/tightness.js';
+import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { personNames } from '../people/person-names.service.js';

@@ -5,6 +5,7 @@ export const texts = {
     people: 'People',
     places: 'Places',
     figures: 'Figures',
+    groups: 'Groups',
     asking: 'To ask',
     settings: 'Settings',
     records: 'Records',

@@ -1,4 +1,4 @@
-import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
+import { AboutItem } from '#src/app/items/about-item.js';
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { TakeBack } from '#src/features/versions/components/take-back.js';
 
@@ -9,12 +9,8 @@ export function Component() {
       lockedAction={({ id, outNumber }, isOfficer) =>
         isOfficer && outNumber !== null ? <TakeBack calendarId={id} number={outNumber} /> : null
       }
-      voices={(communityId, entryId) => (
-        <AttachmentsPanel
-          key={entryId}
-          communityId={communityId}
-          subject={{ subjectType: 'entry', subjectId: entryId }}
-        />
+      about={({ communityId, entryId, ...asked }) => (
+        <AboutItem item={{ communityId, itemType: 'entry', itemId: entryId }} {...asked} />
       )}
     />
   );

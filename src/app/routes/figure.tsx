@@ -1,14 +1,22 @@
-import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
+import { useNavigate } from 'react-router-dom';
+import { AboutItem } from '#src/app/items/about-item.js';
 import { FigurePage } from '#src/features/figures/components/figure-page.js';
 import { MarkerDays } from '#src/features/stars/components/marker-days.js';
+import { useCurrentCommunity } from '#src/lib/community.js';
+import { paths } from '#src/lib/paths.js';
 
-/** A figure with its four days, and the voices and pictures that belong to it. */
+/** A figure with its four days, its voices and pictures, and who may see it. */
 export function Component() {
+  const { communityId } = useCurrentCommunity();
+  const navigate = useNavigate();
   return (
     <FigurePage
       days={(markerKey) => <MarkerDays key={markerKey} markerKey={markerKey} />}
-      voices={({ id, communityId }) => (
-        <AttachmentsPanel communityId={communityId} subject={{ subjectType: 'figure', subjectId: id }} />
+      about={(itemId) => (
+        <AboutItem
+          item={{ communityId, itemType: 'figure', itemId }}
+          onHidden={() => void navigate(paths.villageFigures())}
+        />
       )}
     />
   );

@@ -5,6 +5,7 @@ import { useParams } from 'react-router-dom';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
 import { usePageTitle } from '#src/lib/page-title.js';
+import type { SharingValue } from '#src/lib/sharing-fields.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
 import { useEditor } from '../model/use-editor.js';
 import { useEntryActions } from '../model/use-entry-actions.js';
@@ -13,17 +14,27 @@ import { useWantedMarker } from '../model/use-wanted-marker.js';
 import { DraftClosed } from './draft-closed.js';
 import { EntryView, ListView, WideView } from './editor-views.js';
 import { SubmitDialog } from './submit-dialog.js';
+import { useAskedCircle } from './use-asked-circle.js';
 import { useFormState } from './use-form-state.js';
 
 interface EditorPageProps {
   /** The way out of a locked draft: "take it back". It belongs to the versions. */
   lockedAction: (calendar: Calendar, isOfficer: boolean) => ReactNode;
-  /** What was spoken and photographed about a saved entry. */
-  voices: (communityId: string, entryId: string) => ReactNode;
+  /** Who may see the open entry, and what else belongs to it. */
+  about: (entry: AboutEntry) => ReactNode;
+}
+
+export interface AboutEntry {
+  communityId: string;
+  entryId: string;
+  /** A wider circle that was refused in the form, to be asked for. */
+  wanted: SharingValue | null;
+  onSettled: () => void;
+  onHidden: () => void;
 }
 
 /** The draft of a calendar: the year's strip, its entries, and the one that is open. */
-export function EditorPage({ lockedAction, voices }: EditorPageProps) {
+export function EditorPage({ lockedAction, about }: EditorPageProps) {
   const { calendarId = '' } = useParams();
   const { data: calendar } = useSuspenseQuery(calendarQuery(calendarId));
   const { seesDrafts, isOfficer } = useRolesIn(calendar.communityId);
@@ -34,7 +45,7 @@ export function EditorPage({ lockedAction, voices }: EditorPageProps) {
       calendar={calendar}
       isOfficer={isOfficer}
       lockedAction={lockedAction(calendar, isOfficer)}
-      voices={(entryId) => voices(calendar.communityId, entryId)}
+      about={about}
     />
   );
 }
@@ -43,10 +54,10 @@ interface DraftEditorProps {
   calendar: Calendar;
   isOfficer: boolean;
   lockedAction: ReactNode;
-  voices: (entryId: string) => ReactNode;
+  about: EditorPageProps['about'];
 }
 
-function DraftEditor({ calendar, isOfficer, lockedAction, voices }: DraftEditorProps) {
+function DraftEditor({ calendar, isOfficer, lockedAction, about }: DraftEditorProps) {
   const { t } = useTranslation('calendars');
   const editor = useEditor(calendar, isOfficer);
   useWantedMarker(editor);
@@ -54,6 +65,7 @@ function DraftEditor({ calendar, isOfficer, lockedAction, voices }: DraftEditorP
   const actions = useEntryActions(editor);
   const form = useFormState(editor, saving.problems);
   const [isSubmitting, setIsSubmitting] = useState(false);
+  const asked = useAskedCircle(editor, saving.problems);
   usePageTitle(t('editor.title', { year: calendar.year }));
   const parts = {
     editor,
@@ -61,7 +73,7 @@ function DraftEditor({ calendar, isOfficer, lockedAction, voices }: DraftEditorP
     actions,
     form,
     lockedAction,
-    voices,
+    about: asked === null ? null : about(asked),
     onSubmit: () => {
       setIsSubmitting(true);
     },

@@ -24,7 +24,8 @@ export interface ViewParts {
   actions: EntryActions;
   form: FormState | null;
   lockedAction: ReactNode;
-  voices: (entryId: string) => ReactNode;
+  /** What belongs to the open entry besides its words; null while none that is saved is open. */
+  about: ReactNode;
   onSubmit: () => void;
 }
 
@@ -135,9 +136,9 @@ function OpenEntry(parts: ViewParts) {
   const { selected } = parts.editor;
   if (selected === null) return <p className="text-umber-soft">{t('editor.chooseOne')}</p>;
   return (
-    <div className="grid min-w-0 gap-4">
+    <div className="grid min-w-0 content-start gap-4">
       <EntryBoard {...parts} selected={selected} />
-      {selected.saved !== null && parts.voices(selected.id)}
+      {parts.about}
     </div>
   );
 }

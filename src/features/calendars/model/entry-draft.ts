@@ -43,6 +43,8 @@ export function draftOf(content: EntryInput): EntryDraft {
     sky: lead.type === 'sky' ? withoutType(lead) : NO_SKY,
     fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
     lastDate: lastDate ?? NO_FIXED,
+    sharing: content.sharing ?? PLAIN_DETAILS,
+    giverId: content.giverId ?? null,
   };
 }
 

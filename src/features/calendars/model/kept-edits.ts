@@ -1,4 +1,5 @@
 import { entryInput, entryLead, type EntryInput } from '#shared/contracts/calendars.js';
+import { sharingDetails } from '#shared/contracts/sharing.js';
 import { forget, keep, readAllKept } from '#src/lib/device-storage.js';
 import { draftPrefix } from '#src/lib/kept-draft.js';
 import { hasSign, newDraft, type EntryDraft } from './entry-draft.js';
@@ -59,10 +60,17 @@ function readEdit(kept: unknown): EntryEdit | null {
 function isDraft(draft: unknown): draft is EntryDraft {
   if (typeof draft !== 'object' || draft === null || !('sky' in draft)) return false;
   const start = newDraft();
-  // A sign of the sky has as many shapes as there are kinds: the contract knows them.
-  if (!sameShape({ ...draft, sky: start.sky }, start)) return false;
+  // A sign of the sky has as many shapes as there are kinds, and a level as many details: the contract knows them.
+  const { sky, sharing, giverId } = start;
+  if (!sameShape({ ...draft, sky, sharing, giverId }, start)) return false;
+  if (!isSharingDraft(draft)) return false;
   if (sameShape(draft.sky, start.sky) && !hasSign(draft.sky as EntryDraft['sky'])) return true;
   return entryLead.safeParse({ type: 'sky', ...(draft.sky as object) }).success;
+}
+
+function isSharingDraft(draft: object): boolean {
+  const { sharing, giverId } = draft as { sharing?: unknown; giverId?: unknown };
+  return sharingDetails.safeParse(sharing).success && (giverId === null || typeof giverId === 'string');
 }
 
 /** The same members of the same types, all the way down. */

@@ -1,4 +1,5 @@
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 
 /**
@@ -63,9 +64,18 @@ export function joined(
 }
 
 function sameUnit(unit: Unit, a: EntryInput, b: EntryInput): boolean {
-  return UNITS[unit].every((field) => sameJson(a[field], b[field]));
+  return UNITS[unit].every((field) => sameJson(said(a, field), said(b, field)));
+}
+
+/** What a text says in a field, also where it leaves it out because there is nothing to say. */
+function said(content: EntryInput, field: keyof EntryInput): unknown {
+  if (field === 'sharing') return content.sharing ?? PLAIN_DETAILS;
+  return content[field] ?? null;
 }
 
 function withUnit(unit: Unit, into: EntryInput, from: EntryInput): EntryInput {
-  return { ...into, ...Object.fromEntries(UNITS[unit].map((field) => [field, from[field]])) };
+  const fields: readonly (keyof EntryInput)[] = UNITS[unit];
+  const others = Object.entries(into).filter(([field]) => !fields.some((one) => one === field));
+  const taken = fields.filter((field) => field in from).map((field) => [field, from[field]]);
+  return Object.fromEntries([...others, ...taken]) as EntryInput;
 }

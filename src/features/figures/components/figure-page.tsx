@@ -22,12 +22,12 @@ import { useChartNames } from './use-chart-names.js';
 
 interface FigurePageProps {
   days: (markerKey: string) => ReactNode;
-  /** What people recorded and photographed about it. */
-  voices: (figure: FigureDetail) => ReactNode;
+  /** Who may see it, and what else belongs to it. */
+  about: (figureId: string) => ReactNode;
 }
 
 /** A figure to read: names, story, other tellings, where it is in the sky, and its four days. */
-export function FigurePage({ days, voices }: FigurePageProps) {
+export function FigurePage({ days, about }: FigurePageProps) {
   const { t } = useTranslation('figures');
   const { figureId = '' } = useParams();
   const { communityId } = useCurrentCommunity();
@@ -58,8 +58,8 @@ export function FigurePage({ days, voices }: FigurePageProps) {
         <div className="grid gap-4">
           <Story figure={figure} />
           <InTheSky figure={figure} />
-          {voices(figure)}
           {mayWrite && <FigureUses figure={figure} />}
+          {about(figure.id)}
         </div>
         <div className="grid gap-4">
           {days(figure.markerKey)}
@@ -75,7 +75,7 @@ export function FigurePage({ days, voices }: FigurePageProps) {
 }
 
 function Story({ figure }: { figure: FigureDetail }) {
-  const { t } = useTranslation(['figures', 'sharing']);
+  const { t } = useTranslation('figures');
   const lang = figure.names[0]?.tag;
   return (
     <Board title={t('page.story')}>
@@ -96,7 +96,6 @@ function Story({ figure }: { figure: FigureDetail }) {
           </p>
         </Well>
       ))}
-      <p className="mt-3 text-small text-umber-soft">{t(`sharing:level.${figure.sharingLevel}.note`)}</p>
     </Board>
   );
 }

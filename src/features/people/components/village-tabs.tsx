@@ -15,6 +15,7 @@ export function VillageTabs() {
         { to: paths.villagePlaces(), label: t('tabs.places') },
         { to: paths.villageFigures(), label: t('tabs.figures') },
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
+        { to: paths.villageGroups(), label: t('tabs.groups') },
         ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),
         { to: paths.villageSettings(), label: t('tabs.settings') },
         ...(inner ? [{ to: paths.villageRecords(), label: t('tabs.records') }] : []),

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { ArrowRight } from 'lucide-react';
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Navigate, useLocation } from 'react-router-dom';
 import type { Today, WaitingItem } from '#shared/contracts/today.js';
@@ -21,7 +22,7 @@ import { WaitingBoard } from './waiting-board.js';
 import { WatchCard } from './watch-card.js';
 
 /** What waits for the person, the peg, and what to look for. Who comes in for one task is led on to it. */
-export function TodayPage() {
+export function TodayPage({ asked }: { asked: ReactNode }) {
   const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
   const { place, isLoading } = useCurrentPlace();
@@ -49,7 +50,7 @@ export function TodayPage() {
       {today.error !== null && !data && (
         <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
       )}
-      {data && <TodayBoards data={data} />}
+      {data && <TodayBoards data={data} asked={asked} />}
     </Page>
   );
 }
@@ -60,7 +61,7 @@ function useHasJustCome(): boolean {
   return location.key === 'default' || hasArrived(location.state);
 }
 
-function TodayBoards({ data }: { data: Today }) {
+function TodayBoards({ data, asked }: { data: Today; asked: ReactNode }) {
   const { t } = useTranslation('today');
   const { is } = useRoles();
   const { place } = useCurrentPlace();
@@ -82,6 +83,7 @@ function TodayBoards({ data }: { data: Today }) {
           <>
             <div className="grid content-start gap-4">
               {waiting}
+              {asked}
               <MainAction item={data.waiting[0]} />
               <ComingBoard today={data} />
             </div>
@@ -98,6 +100,7 @@ function TodayBoards({ data }: { data: Today }) {
             </div>
             <div className="grid content-start gap-4">
               {waiting}
+              {asked}
               <ComingBoard today={data} />
             </div>
           </>

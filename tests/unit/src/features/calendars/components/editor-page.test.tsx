@@ -75,7 +75,7 @@ const draft = (...changes: Partial<EntryInput>[]): Saved => ({
 
 const open = (search = '', session = OFFICER) =>
   renderOnBoard(
-    <EditorPage voices={() => null} lockedAction={() => <button type="button">Take it back</button>} />,
+    <EditorPage about={() => null} lockedAction={() => <button type="button">Take it back</button>} />,
     {
       session,
       path: `/calendars/${CALENDAR.id}${search}`,

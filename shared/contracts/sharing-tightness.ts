@@ -1,9 +1,4 @@
-import {
-  SHARING_LEVELS,
-  type SharingDetails,
-  type SharingLevel,
-  type TellingSeason,
-} from '#shared/contracts/sharing.js';
+import { SHARING_LEVELS, type SharingDetails, type SharingLevel, type TellingSeason } from './sharing.js';
 
 export interface Sharing {
   level: SharingLevel;

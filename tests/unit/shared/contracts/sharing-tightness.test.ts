@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { isTighterOrSame, type Sharing } from '#server/policy/tightness.js';
+import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import {
   PLAIN_DETAILS,
   SHARING_LEVELS,

@@ -1,0 +1,31 @@
+import { useTranslation } from 'react-i18next';
+import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
+import { SharingPanel } from '#src/features/sharing/components/sharing-panel.js';
+import type { SharingValue } from '#src/lib/sharing-fields.js';
+import type { ItemRef } from '#src/lib/sharing-queries.js';
+import { Board } from '#src/ui/surfaces.js';
+
+export interface AboutItemProps {
+  item: ItemRef & { itemType: 'entry' | 'figure' };
+  wanted?: SharingValue | null | undefined;
+  onSettled?: (() => void) | undefined;
+  onHidden?: (() => void) | undefined;
+}
+
+/** What belongs to a thing besides its own words, wherever it is shown: voices and pictures, who may see it. */
+export function AboutItem({ item, ...sharing }: AboutItemProps) {
+  const { t } = useTranslation('sharing');
+  const { communityId, itemType, itemId } = item;
+  return (
+    <>
+      <AttachmentsPanel
+        key={`voices ${itemId}`}
+        communityId={communityId}
+        subject={{ subjectType: itemType, subjectId: itemId }}
+      />
+      <Board title={t('title')}>
+        <SharingPanel key={itemId} item={item} {...sharing} />
+      </Board>
+    </>
+  );
+}
