@@ -28,7 +28,7 @@ interface Saved {
 function server(saved: Saved): Answers {
   const answers: Record<string, unknown> = {
     [`GET ${calendarPath}`]: () => saved.calendar,
-    [`GET ${calendarPath}/entries`]: () => list(saved.entries),
+    [`GET ${calendarPath}/entries`]: () => ({ ...list(saved.entries), keptCount: 0 }),
     [`GET ${calendarPath}/versions`]: () => list([]),
     [`GET ${communityPath}`]: () => ({
       ...UPPER_TAZIMEL.settings,
@@ -36,6 +36,8 @@ function server(saved: Saved): Answers {
       signOffRule: { minElders: 1, mustSign: [], oneOf: [], steward: false },
       version: 1,
     }),
+    [`GET ${communityPath}/groups`]: () => list([]),
+    [`GET ${communityPath}/people`]: () => list([]),
     [`GET ${communityPath}/places`]: () => list([TAZIMEL]),
     [`GET /api/places/${TAZIMEL.id}/stars`]: () => table,
     [`POST ${calendarPath}/entries`]: ({ body }: Sent) => {
