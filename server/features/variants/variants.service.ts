@@ -20,7 +20,7 @@ import type { Clock } from '../../http/context.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { isKept, maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing, sharedById } from '../../policy/sharing.repository.js';
-import { isTighterOrSame } from '../../policy/tightness.js';
+import { isTighterOrSame } from '#shared/contracts/sharing-tightness.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { lockOpenDraft, readDraft, recordContribution } from '../calendars/draft.service.js';
