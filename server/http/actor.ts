@@ -14,11 +14,11 @@ export interface Actor {
   roles: readonly Role[];
 }
 
-export function hasRole(actor: Actor, ...roles: Role[]): boolean {
+export function hasRole(actor: Pick<Actor, 'roles'>, ...roles: Role[]): boolean {
   return roles.some((role) => actor.roles.includes(role));
 }
 
 /** Drafts and reviews are for those who compile, review and sign. */
-export function seesDrafts(actor: Actor): boolean {
+export function seesDrafts(actor: Pick<Actor, 'roles'>): boolean {
   return hasRole(actor, 'officer', 'elder', 'steward');
 }

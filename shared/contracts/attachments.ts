@@ -2,6 +2,15 @@ import { z } from 'zod';
 import { id, instant, line, listOf, rowVersion, text } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { languageTag, ROLES } from './people.js';
+import {
+  groupFitsLevel,
+  NAMINGS,
+  PLAIN_DETAILS,
+  sharingDetails,
+  sharingLevel,
+  type SharingDetails,
+  type SharingLevel,
+} from './sharing.js';
 import { markerKey } from './stars.js';
 
 const MIB = 1024 * 1024;
@@ -23,13 +32,11 @@ export type AttachmentKind = (typeof ATTACHMENT_KINDS)[number];
 export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker', 'consent'] as const;
 export type AttachmentSubjectType = (typeof ATTACHMENT_SUBJECTS)[number];
 
-export const ATTACHMENT_LEVELS = ['village', 'elders'] as const;
-export type AttachmentLevel = (typeof ATTACHMENT_LEVELS)[number];
-/** Before anybody chooses: what was spoken is for the elders, what was photographed for the village. */
-export const DEFAULT_LEVEL = { recording: 'elders', picture: 'village' } as const satisfies Record<
-  AttachmentKind,
-  AttachmentLevel
->;
+/** Before anybody chooses: what was spoken is for the elders and leaves no trace, what was photographed for the village. */
+export const DEFAULT_SHARING = {
+  recording: { level: 'elders', details: { ...PLAIN_DETAILS, trace: 'none' } },
+  picture: { level: 'village', details: PLAIN_DETAILS },
+} as const satisfies Record<AttachmentKind, { level: SharingLevel; details: SharingDetails }>;
 
 /**
  * How the people who are heard or seen agreed: by a clip of their own voice (always so for a recording), because
@@ -65,13 +72,19 @@ export const attachmentInput = subjectFields
     speaker: line(80),
     language: languageTag.nullable(),
     consent: z.enum(CONSENT_WAYS),
-    level: z.enum(ATTACHMENT_LEVELS),
+    sharingLevel,
+    sharing: sharingDetails,
+    /** Whose it is, where they are one of the village's people here; null: whoever sends it. */
+    giverId: id.nullable(),
   })
   .superRefine(subjectIsNamed)
-  .superRefine(({ kind, speaker, language, consent }, context) => {
+  .superRefine(({ kind, speaker, language, consent, sharingLevel: level, sharing }, context) => {
     const refuse = (field: string, message: string) => {
-      context.addIssue({ code: 'custom', path: [field], message });
+      context.addIssue({ code: 'custom', path: field.split('.'), message });
     };
+    groupFitsLevel({ level, groupId: sharing.groupId }, (code) => {
+      refuse('sharing.groupId', code);
+    });
     if (kind === 'picture') {
       if (consent === 'clip') refuse('consent', 'not-in-list');
       return;
@@ -134,10 +147,13 @@ export const attachment = z.strictObject({
   subjectType: z.enum(ATTACHMENT_SUBJECTS),
   subjectId: z.string(),
   title: z.string(),
+  /** Empty where its giver is not to be named to the reader. */
   speaker: z.string(),
+  naming: z.enum(NAMINGS),
   language: z.string().nullable(),
   consent: z.enum(CONSENT_WAYS),
-  level: z.enum(ATTACHMENT_LEVELS),
+  sharingLevel,
+  /** Empty where its giver is not to be named to the reader. */
   addedBy: z.string(),
   addedAt: instant,
   /** By number; the spoken consent first. */

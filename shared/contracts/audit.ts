@@ -21,7 +21,6 @@ export const AUDIT_ACTIONS = [
   'figure-taken-out',
   'figure-put-back',
   'attachment-added',
-  'attachment-opened',
   'attachment-words-written',
   'attachment-removed',
   'group-founded',

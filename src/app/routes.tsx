@@ -89,7 +89,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,
-    texts: ['reviews', 'sky', 'attachments'],
+    texts: ['reviews', 'sky', 'attachments', 'sharing'],
     load: () => import('./routes/review.js'),
     rail: false,
   },

@@ -22,7 +22,7 @@ beforeAll(async () => {
   api = await openTestApi();
   [officer, elder] = await Promise.all([api.signIn('officer'), api.signIn('elder')]);
   figureId = (await addFigure(officer)).id;
-  voice = await addRecording(elder, figureId, { level: 'village' }, ['a voice']);
+  voice = await addRecording(elder, figureId, { sharingLevel: 'village' }, ['a voice']);
   sound = webm({ note: 'a voice' });
 });
 afterAll(() => api.close());
@@ -96,7 +96,7 @@ describe('a kept file', () => {
   });
 
   it('that the store has lost is not there', async () => {
-    const lost = await addRecording(elder, figureId, { level: 'village' });
+    const lost = await addRecording(elder, figureId, { sharingLevel: 'village' });
     const row = await api.dataSource
       .getRepository(AttachmentPartEntity)
       .findOneByOrFail({ attachmentId: lost.id, part: 1 });

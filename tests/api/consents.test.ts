@@ -180,7 +180,10 @@ describe('a voice as proof', () => {
   it('belongs to the consent, is played by those who read it, and is nothing to anybody else', async () => {
     const { officer, elder2, staff, millet } = village;
     const consent = await addConsent(officer, 'entry', millet, asked());
-    const voice = await addRecording(officer, consent.id, { subjectType: 'consent', level: 'village' });
+    const voice = await addRecording(officer, consent.id, {
+      subjectType: 'consent',
+      sharingLevel: 'village',
+    });
     const proof = { kind: 'voice', witness: '', attachmentId: voice.id } as const;
     const given = await changeConsent(officer, consent, consentContent({ proof })).expect(200);
     expect((given.body as Consent).content.proof).toEqual(proof);

@@ -130,7 +130,14 @@ describe('a telling season', () => {
 });
 
 /** Where a thing of each person is to be found. */
-const SHOWING = new Set(['listEntries', 'readVersion', 'listFigures', 'listAnswers', 'readConsent']);
+const SHOWING = new Set([
+  'listEntries',
+  'readVersion',
+  'listFigures',
+  'listAnswers',
+  'readConsent',
+  'listAttachments',
+]);
 
 function plantedIn(where: string): Planted {
   const found = village.planted.find((one) => one.where === where);

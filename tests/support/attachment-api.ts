@@ -1,4 +1,5 @@
 import type { Attachment, AttachmentInput } from '#shared/contracts/attachments.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { randomUUID } from 'node:crypto';
 import type { Client } from './api.js';
 import { plainPicture, webm } from './media.js';
@@ -14,7 +15,9 @@ export function attachmentInput(changes: Partial<AttachmentInput> = {}): Attachm
     speaker: '',
     language: null,
     consent: 'asked',
-    level: 'village',
+    sharingLevel: 'village',
+    sharing: PLAIN_DETAILS,
+    giverId: null,
     ...changes,
   };
 }
@@ -27,7 +30,8 @@ export function recordingInput(changes: Partial<AttachmentInput> = {}): Attachme
     speaker: 'A-2',
     language: 'art-x-tazimel',
     consent: 'clip',
-    level: 'elders',
+    sharingLevel: 'elders',
+    sharing: { ...PLAIN_DETAILS, trace: 'none' },
     ...changes,
   });
 }

@@ -12,9 +12,10 @@ export function attachmentOf(changes: Partial<Attachment> = {}): Attachment {
     subjectId: '0190a3a0-0000-7000-8000-0000000000f1',
     title: 'Why the bowl is empty',
     speaker: 'A-2',
+    naming: 'named',
     language: 'art-x-tazimel',
     consent: 'clip',
-    level: 'village',
+    sharingLevel: 'village',
     addedBy: 'Elder A-2',
     addedAt: '2027-03-10T06:00:00.000Z',
     parts: [

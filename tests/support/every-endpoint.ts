@@ -17,7 +17,10 @@ export async function textOf(
   path: string,
   { fileType }: Pick<Endpoint, 'fileType'>,
 ): Promise<string> {
-  if (fileType !== 'application/pdf') return (await client.get(path)).text;
+  if (fileType !== 'application/pdf') {
+    const { text, body } = (await client.get(path)) as { text: string; body: unknown };
+    return Buffer.isBuffer(body) ? body.toString('latin1') : text;
+  }
   const answer = await client
     .get(path)
     .buffer(true)

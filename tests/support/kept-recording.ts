@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import type { KeptRecording } from '#src/features/attachments/model/kept-recordings.js';
 
 /** A recording as it lies on a device before it is sent. */
@@ -12,7 +13,9 @@ export function keptRecording(changes: Partial<KeptRecording> = {}): KeptRecordi
     title: '',
     speaker: 'A-2',
     language: 'art-x-tazimel',
-    level: 'elders',
+    sharingLevel: 'elders',
+    sharing: PLAIN_DETAILS,
+    giverId: null,
     mimeType: 'audio/webm',
     beganAt: '2027-03-10T06:00:00.000Z',
     ...changes,

@@ -19,6 +19,7 @@ import {
 import type { Variant, VariantInput } from '#shared/contracts/variants.js';
 import { variantInput } from './variant-api.js';
 import { addConsent } from './consent-api.js';
+import { addRecording } from './attachment-api.js';
 import { addFigure, figureInput } from './figure-api.js';
 import { addGroup, details } from './sharing-api.js';
 
@@ -193,6 +194,21 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
     ]);
     consents.push(await addConsent(elder, 'entry', entry.id, { ...agreed(word), giverId: elder.personId }));
   }
+  const [openEntry] = reviewed.entries;
+  const recordings = [];
+  for (const [level, seers, changes] of [
+    ['village', VILLAGE, {}],
+    ['elders', ['giver', 'heir', 'weaver'], {}],
+    ['group', ['giver', 'weaver', 'observer of the group'], { groupId: group.id }],
+    ['sealed', ['giver', 'heir'], { successorId: elder2.personId }],
+  ] as const) {
+    const title = plant(`${level} recording`, seers);
+    recordings.push(
+      await addRecording(elder, openEntry?.entryId ?? '', {
+        ...{ subjectType: 'entry', title, speaker: title, sharingLevel: level, sharing: details(changes) },
+      }),
+    );
+  }
   const numbers = [String(published.number), String(reviewed.number)];
   const [sealed] = kept.slice(2);
   return {
@@ -215,12 +231,12 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       figureId: Object.values(figures).map(({ id }) => id),
       markerKey: Object.values(figures).map(({ markerKey }) => markerKey),
       itemType: [...SHARED_ITEM_TYPES],
-      itemId: [...kept, ...Object.values(figures)].map(({ id }) => id),
+      itemId: [...kept, ...Object.values(figures), ...recordings].map(({ id }) => id),
       groupId: [group.id],
       variantId: variants.map(({ variantId }) => variantId),
       consentId: consents.map(({ id }) => id),
-      attachmentId: [randomUUID()],
       withdrawalId: [randomUUID()],
+      attachmentId: recordings.map(({ id }) => id),
       part: ['0', '1'],
       personId: [elder.personId],
       deviceId: ['0'.repeat(64)],
@@ -240,9 +256,9 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       readSheet: ['?layout=month-cards', '?layout=year-board'],
       printSheet: ['?layout=month-cards'],
       listAuditEvents: ['?limit=200'],
-      listAttachments: [...kept, ...Object.values(figures)].map(
+      listAttachments: [{ id: openEntry?.entryId ?? '' }, ...kept, ...Object.values(figures)].map(
         ({ id }) =>
-          `?subjectType=${kept.some((entry) => entry.id === id) ? 'entry' : 'figure'}&subjectId=${id}`,
+          `?subjectType=${Object.values(figures).some((figure) => figure.id === id) ? 'figure' : 'entry'}&subjectId=${id}`,
       ),
     },
   };

@@ -1,9 +1,4 @@
-import type {
-  AttachmentKind,
-  AttachmentLevel,
-  AttachmentSubjectType,
-  ConsentWay,
-} from '#shared/contracts/attachments.js';
+import type { AttachmentKind, AttachmentSubjectType, ConsentWay } from '#shared/contracts/attachments.js';
 import {
   Column,
   Entity,
@@ -58,9 +53,6 @@ export class AttachmentEntity {
 
   @Column(codeColumn(16))
   consent!: ConsentWay;
-
-  @Column({ name: 'sharing_level', ...codeColumn(16) })
-  sharingLevel!: AttachmentLevel;
 
   @Column({ name: 'width_px', type: 'int', nullable: true })
   widthPx!: number | null;

@@ -4,6 +4,7 @@ import { Figures1796400000000 } from './1796400000000-figures.js';
 import { Sharing1796600000000 } from './1796600000000-sharing.js';
 import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 import { Attachments1797200000000 } from './1797200000000-attachments.js';
+import { AttachmentSharing1797300000000 } from './1797300000000-attachment-sharing.js';
 import { Consents1797400000000 } from './1797400000000-consents.js';
 import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
 import { Variants1798000000000 } from './1798000000000-variants.js';
@@ -16,6 +17,7 @@ export const MIGRATIONS = [
   Sharing1796600000000,
   RainMonths1797000000000,
   Attachments1797200000000,
+  AttachmentSharing1797300000000,
   Consents1797400000000,
   Withdrawals1797800000000,
   Variants1798000000000,

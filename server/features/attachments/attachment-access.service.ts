@@ -1,34 +1,54 @@
 import type { EntityManager } from 'typeorm';
 import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
-import { hasRole, type Actor } from '../../http/actor.js';
+import { maySee, type Shared } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import type { Viewer } from '../../policy/viewer.js';
 import { maySeeSubject } from './attachment-subjects.repository.js';
 
-type Row = Pick<
-  AttachmentEntity,
-  'communityId' | 'subjectType' | 'subjectId' | 'sharingLevel' | 'addedBy' | 'kind' | 'parts'
->;
+/** An attachment that somebody may know of, with what the policy knows about it. */
+export interface SeenAttachment {
+  row: AttachmentEntity;
+  shared: Shared;
+}
 
 /**
- * Whether somebody may know of an attachment at all. It shows no more than what it belongs to, and no more than its
- * own level; a recording of which only the spoken consent has come is its sender's alone.
+ * Those of the rows that somebody may know of at all. An attachment shows no more than what it belongs to, and no more
+ * than its own level; a recording of which only the spoken consent has come is its sender's alone.
  */
-export async function mayReadAttachment(manager: EntityManager, actor: Actor, row: Row): Promise<boolean> {
-  if (row.communityId !== actor.communityId) return false;
-  const isOwn = row.addedBy === actor.person.id;
-  const isWhole = row.kind === 'picture' || row.parts.some(({ part }) => part > 0);
-  const fitsLevel = row.sharingLevel === 'village' || hasRole(actor, 'elder');
-  return (isOwn || (isWhole && fitsLevel)) && (await maySeeSubject(manager, actor, row));
+export async function seenAttachments(
+  manager: EntityManager,
+  viewer: Viewer,
+  rows: readonly AttachmentEntity[],
+): Promise<SeenAttachment[]> {
+  const shared = await sharedById(
+    manager,
+    'attachment',
+    rows.map(({ id }) => id),
+  );
+  const seen: SeenAttachment[] = [];
+  for (const row of rows) {
+    const own = shared.get(row.id);
+    if (own === undefined || !maySee(viewer, own)) continue;
+    if (!isWhole(row) && row.addedBy !== viewer.personId) continue;
+    if (await maySeeSubject(manager, viewer, row)) seen.push({ row, shared: own });
+  }
+  return seen;
 }
 
-/** The spoken consent is proof for those who keep the village's word, and for whoever brought it. */
-export function mayHearConsent(actor: Actor, { addedBy }: Pick<Row, 'addedBy'>): boolean {
-  return addedBy === actor.person.id || hasRole(actor, 'elder', 'steward', 'officer');
+function isWhole({ kind, parts }: AttachmentEntity): boolean {
+  return kind === 'picture' || parts.some(({ part }) => part > 0);
 }
 
-export function mayWriteWords(actor: Actor): boolean {
-  return hasRole(actor, 'officer', 'elder', 'steward');
+/** The spoken consent is proof for those who keep the village's word, and for whoever gave or brought it. */
+export function mayHearConsent(viewer: Viewer, seen: SeenAttachment): boolean {
+  return mayRemove(viewer, seen) || mayWriteWords(viewer);
 }
 
-export function mayChange(actor: Actor, { addedBy }: Pick<Row, 'addedBy'>): boolean {
-  return addedBy === actor.person.id;
+export function mayWriteWords({ roles }: Viewer): boolean {
+  return roles.includes('officer') || roles.includes('elder') || roles.includes('steward');
+}
+
+/** Whoever brought it, and whose it is: taking back is as easy as giving. */
+export function mayRemove({ personId }: Viewer, { row, shared }: SeenAttachment): boolean {
+  return row.addedBy === personId || shared.giverId === personId;
 }

@@ -5,13 +5,13 @@ import type { Actor } from '../../http/actor.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 
-/** Kind and level go into the record: by them the list of records knows whom a row is for. */
+/** The kind goes into the record: the sentence says "a recording" or "a picture" and never what it is called. */
 export async function recordAttachment(
   manager: EntityManager,
   clock: Clock,
   actor: Actor,
   action: Extract<AuditAction, `attachment-${string}`>,
-  { id, kind, sharingLevel }: Pick<AttachmentEntity, 'id' | 'kind' | 'sharingLevel'>,
+  { id, kind }: Pick<AttachmentEntity, 'id' | 'kind'>,
 ): Promise<void> {
   await recordAudit(manager, {
     at: clock.now(),
@@ -20,6 +20,6 @@ export async function recordAttachment(
     action,
     subjectType: 'attachment',
     subjectId: id,
-    details: { kind, level: sharingLevel },
+    details: { kind },
   });
 }

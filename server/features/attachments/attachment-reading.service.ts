@@ -1,14 +1,14 @@
 import type { Readable } from 'node:stream';
-import type { DataSource } from 'typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
 import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordingsMayBeOpened } from '../../policy/consent-gate.js';
-import { villageDay } from '../../policy/viewer.js';
 import { FileNotStored, type ByteRange, type FileStore } from '../../storage/file-store.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { mayHearConsent } from './attachment-access.service.js';
-import { recordAttachment } from './attachment-audit.js';
 import { readable } from './attachments.repository.js';
 
 const ENDINGS: Readonly<Record<string, string>> = {
@@ -42,20 +42,27 @@ export class AttachmentReadingService {
     number: number,
     fromBeginning: boolean,
   ): Promise<OpenedFile> {
-    const row = await readable(this.dataSource.manager, actor, attachmentId);
+    const { manager } = this.dataSource;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const seen = await readable(manager, viewer, attachmentId);
+    const { row } = seen;
     const part = row.parts.find((each) => each.part === number);
-    if (part === undefined || (number === 0 && !mayHearConsent(actor, row))) throw notFound();
+    if (part === undefined || (number === 0 && !mayHearConsent(viewer, seen))) throw notFound();
     // The spoken consent is proof of what was said, so it does not wait for what was said.
-    if (number > 0) await this.expectMayBeOpened(actor, row);
-    if (fromBeginning) await this.writeDown(actor, row);
+    if (number > 0) await expectMayBeOpened(manager, viewer, row);
+    if (fromBeginning) {
+      await recordKeptReads(manager, viewer, this.clock.now(), 'attachment', [attachmentId]);
+    }
     const { storageKey, bytes, contentType, sha256 } = part;
     const fileName = `${row.title || row.kind}-${number}.${ENDINGS[contentType] ?? 'bin'}`;
     return { bytes, contentType, fileName, tag: sha256, open: (range) => this.open(storageKey, range) };
   }
 
   async thumbnail(actor: Actor, attachmentId: string): Promise<OpenedFile> {
-    const row = await readable(this.dataSource.manager, actor, attachmentId);
-    await this.expectMayBeOpened(actor, row);
+    const { manager } = this.dataSource;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const { row } = await readable(manager, viewer, attachmentId);
+    await expectMayBeOpened(manager, viewer, row);
     const part = row.parts.find(({ thumbnailKey }) => thumbnailKey !== null);
     const key = part?.thumbnailKey ?? null;
     const facts = key === null ? null : await this.store.stat(key);
@@ -69,14 +76,6 @@ export class AttachmentReadingService {
     };
   }
 
-  /** Where the giver shares only what was said, the voice or the picture itself is there for its sender alone. */
-  private async expectMayBeOpened(actor: Actor, row: AttachmentEntity): Promise<void> {
-    const { manager } = this.dataSource;
-    if (row.addedBy === actor.person.id) return;
-    const today = await villageDay(manager, row.communityId, this.clock.now());
-    if (!(await recordingsMayBeOpened(manager, today, row))) throw notFound();
-  }
-
   private async open(key: string, range?: ByteRange): Promise<Readable> {
     try {
       return await this.store.read(key, range);
@@ -84,10 +83,14 @@ export class AttachmentReadingService {
       throw cause instanceof FileNotStored ? notFound() : cause;
     }
   }
+}
 
-  /** Who opened what is not for the whole village is written down; one's own is nobody's business. */
-  private async writeDown(actor: Actor, row: AttachmentEntity): Promise<void> {
-    if (row.sharingLevel === 'village' || row.addedBy === actor.person.id) return;
-    await recordAttachment(this.dataSource.manager, this.clock, actor, 'attachment-opened', row);
-  }
+/** Where the giver shares only what was said, the voice or the picture itself is there for its sender alone. */
+async function expectMayBeOpened(
+  manager: EntityManager,
+  viewer: Viewer,
+  row: AttachmentEntity,
+): Promise<void> {
+  if (row.addedBy === viewer.personId) return;
+  if (!(await recordingsMayBeOpened(manager, viewer.today, row))) throw notFound();
 }

@@ -5,43 +5,60 @@ import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
-import { seesDrafts, type Actor } from '../../http/actor.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { maySee } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import type { Viewer } from '../../policy/viewer.js';
+import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { readableConsent } from '../consents/readable-consent.service.js';
-import { everyVillageFigure } from '../figures/village-figures.service.js';
+import { figuresSeenBy } from '../figures/village-figures.service.js';
 
-type Look = (manager: EntityManager, actor: Actor, id: string) => Promise<boolean>;
+type Look = (manager: EntityManager, viewer: Viewer, id: string) => Promise<boolean>;
 
-/** Whether each kind of thing is there, in the actor's village, for the actor to see. */
+/** Drafts are for those who see drafts; what stands in a published version is for everybody, as far as its level goes. */
+const looksAtEntry: Look = async (manager, viewer, id) => {
+  const ofVillage = { communityId: viewer.communityId };
+  const entry = await manager.findOneBy(EntryEntity, { id, calendar: ofVillage });
+  if (entry === null) return false;
+  const isThere =
+    (seesDrafts(viewer) && entry.deletedAt === null) ||
+    (await manager.existsBy(VersionEntryEntity, {
+      entryId: id,
+      calendarVersion: { state: 'published', calendar: ofVillage },
+    }));
+  if (!isThere) return false;
+  const thing = { entryId: id, markerKey: markerKeyOfLead(entry.content.lead) };
+  return (await entrySight(manager, viewer, [thing])).appearance(thing) === 'full';
+};
+
+/** Whether each kind of thing is there, in the viewer's village, for the viewer to see. */
 const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
-  /** Drafts are for those who see drafts; what stands in a published version is for everybody. */
-  entry: async (manager, actor, id) => {
-    const ofVillage = { communityId: actor.communityId };
-    const inDraft =
-      seesDrafts(actor) &&
-      (await manager.existsBy(EntryEntity, { id, deletedAt: IsNull(), calendar: ofVillage }));
-    return (
-      inDraft ||
-      (await manager.existsBy(VersionEntryEntity, {
-        entryId: id,
-        calendarVersion: { state: 'published', calendar: ofVillage },
-      }))
-    );
+  entry: looksAtEntry,
+  figure: async (manager, viewer, id) => {
+    const { communityId } = viewer;
+    const isThere = await manager.existsBy(FigureEntity, { id, communityId, takenOutAt: IsNull() });
+    return isThere && maySee(viewer, (await sharedById(manager, 'figure', [id])).get(id));
   },
-  figure: (manager, { communityId }, id) =>
-    manager.existsBy(FigureEntity, { id, communityId, takenOutAt: IsNull() }),
-  answer: async (manager, actor, id) =>
-    seesDrafts(actor) &&
-    (await manager.existsBy(AnswerEntity, { id, calendar: { communityId: actor.communityId } })),
-  marker: async (manager, { communityId }, key) =>
-    resolveMarker(key, await everyVillageFigure(manager, communityId)) !== null,
+  /** An elder's word is for whoever reviews, and never wider than its entry. */
+  answer: async (manager, viewer, id) => {
+    if (!seesDrafts(viewer)) return false;
+    const calendar = { communityId: viewer.communityId };
+    const answer = await manager.findOneBy(AnswerEntity, { id, calendar });
+    return answer !== null && looksAtEntry(manager, viewer, answer.entryId);
+  },
+  marker: async (manager, viewer, key) => resolveMarker(key, await figuresSeenBy(manager, viewer)) !== null,
   /** Proof of a consent is for those who read the consent. */
-  consent: async (manager, actor, id) => readableConsent(manager, actor, id, new Date()),
+  consent: readableConsent,
 };
 
 export async function maySeeSubject(
   manager: EntityManager,
-  actor: Actor,
+  viewer: Viewer,
   { subjectType, subjectId }: AttachmentSubject,
 ): Promise<boolean> {
-  return LOOKS[subjectType](manager, actor, subjectId);
+  return LOOKS[subjectType](manager, viewer, subjectId);
+}
+
+function seesDrafts({ roles }: Viewer): boolean {
+  return roles.includes('officer') || roles.includes('elder') || roles.includes('steward');
 }

@@ -6,6 +6,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { viewerOf } from '../../policy/viewer.js';
 import { recordAttachment } from './attachment-audit.js';
 import { toWords } from './attachments.mapper.js';
 import { lockAttachment, readable } from './attachments.repository.js';
@@ -23,7 +24,8 @@ export class AttachmentWordsService {
     return inTransaction(this.dataSource, async (manager) => {
       // Two first writers meet here, before either has read: else both would find nothing to be newer than.
       await lockAttachment(manager, attachmentId);
-      const attachment = await readable(manager, actor, attachmentId);
+      const viewer = await viewerOf(manager, actor, this.clock.now());
+      const { row } = await readable(manager, viewer, attachmentId);
       const before = await manager.findOne(AttachmentWordsEntity, {
         where: { attachmentId, kind, language },
         relations: { author: true },
@@ -36,8 +38,8 @@ export class AttachmentWordsService {
       } else {
         await manager.update(AttachmentWordsEntity, { id: before.id, version: before.version }, changes);
       }
-      await recordAttachment(manager, this.clock, actor, 'attachment-words-written', attachment);
-      return describe(manager, actor, await readable(manager, actor, attachmentId));
+      await recordAttachment(manager, this.clock, actor, 'attachment-words-written', row);
+      return describe(manager, viewer, await readable(manager, viewer, attachmentId));
     });
   }
 }

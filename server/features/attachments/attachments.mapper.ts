@@ -1,11 +1,19 @@
 import type { Attachment, AttachmentWords } from '#shared/contracts/attachments.js';
-import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { AttachmentWordsEntity } from '../../db/entities/attachment-words.entity.js';
-import type { Actor } from '../../http/actor.js';
-import { mayChange, mayHearConsent, mayWriteWords } from './attachment-access.service.js';
+import type { Viewer } from '../../policy/viewer.js';
+import {
+  mayHearConsent,
+  mayRemove,
+  mayWriteWords,
+  type SeenAttachment,
+} from './attachment-access.service.js';
 
-export function toAttachment(row: AttachmentEntity, actor: Actor, addedByName: string): Attachment {
+export function toAttachment(seen: SeenAttachment, viewer: Viewer, addedByName: string): Attachment {
+  const { row, shared } = seen;
   const { widthPx, heightPx } = row;
+  const { naming } = shared.details;
+  const isNamed = naming === 'named' || shared.giverId === viewer.personId;
+  const addedByGiver = row.addedBy === shared.giverId;
   return {
     id: row.id,
     communityId: row.communityId,
@@ -14,19 +22,20 @@ export function toAttachment(row: AttachmentEntity, actor: Actor, addedByName: s
     subjectType: row.subjectType,
     subjectId: row.subjectId,
     title: row.title,
-    speaker: row.speaker,
+    speaker: isNamed ? row.speaker : '',
+    naming,
     language: row.language,
     consent: row.consent,
-    level: row.sharingLevel,
-    addedBy: addedByName,
+    sharingLevel: shared.level,
+    addedBy: isNamed || !addedByGiver ? addedByName : '',
     addedAt: row.addedAt.toISOString(),
     parts: row.parts
-      .filter(({ part }) => part > 0 || mayHearConsent(actor, row))
+      .filter(({ part }) => part > 0 || mayHearConsent(viewer, seen))
       .sort((a, b) => a.part - b.part)
       .map(({ part, contentType, bytes, seconds }) => ({ part, contentType, bytes, seconds })),
     picture: widthPx === null || heightPx === null ? null : { widthPx, heightPx },
     words: row.words.sort((a, b) => wordsOrder(a).localeCompare(wordsOrder(b))).map(toWords),
-    may: { writeWords: mayWriteWords(actor), remove: mayChange(actor, row) },
+    may: { writeWords: mayWriteWords(viewer), remove: mayRemove(viewer, seen) },
   };
 }
 

@@ -3,32 +3,35 @@ import type { EntityManager, FindOptionsWhere } from 'typeorm';
 import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { notFound } from '../../http/app-error.js';
 import type { Actor } from '../../http/actor.js';
-import { mayReadAttachment } from './attachment-access.service.js';
+import type { Viewer } from '../../policy/viewer.js';
+import { seenAttachments, type SeenAttachment } from './attachment-access.service.js';
 
 const WHOLE = { parts: true, words: { author: true } } as const;
 
-/** Oldest first. */
+/** Of one thing, oldest first, as far as the viewer may know of them. */
 export async function attachmentsOf(
   manager: EntityManager,
-  communityId: string,
+  viewer: Viewer,
   { subjectType, subjectId }: AttachmentSubject,
-): Promise<AttachmentEntity[]> {
-  return manager.find(AttachmentEntity, {
-    where: { communityId, subjectType, subjectId },
+): Promise<SeenAttachment[]> {
+  const rows = await manager.find(AttachmentEntity, {
+    where: { communityId: viewer.communityId, subjectType, subjectId },
     relations: WHOLE,
     order: { addedAt: 'ASC', id: 'ASC' },
   });
+  return seenAttachments(manager, viewer, rows);
 }
 
-/** One that the actor may know of; anything else is not there. */
+/** One that the viewer may know of; anything else is not there. */
 export async function readable(
   manager: EntityManager,
-  actor: Actor,
+  viewer: Viewer,
   attachmentId: string,
-): Promise<AttachmentEntity> {
+): Promise<SeenAttachment> {
   const row = await findWhole(manager, { id: attachmentId });
-  if (row === null || !(await mayReadAttachment(manager, actor, row))) throw notFound();
-  return row;
+  const [seen] = row === null ? [] : await seenAttachments(manager, viewer, [row]);
+  if (seen === undefined) throw notFound();
+  return seen;
 }
 
 /** What the actor has sent under an id of their own device. */
@@ -38,6 +41,15 @@ export async function sentBefore(
   clientId: string,
 ): Promise<AttachmentEntity | null> {
   return findWhole(manager, { communityId, addedBy: person.id, clientId });
+}
+
+/** What the actor has begun to send, whoever may see it. */
+export async function ownAttachment(
+  manager: EntityManager,
+  { communityId, person }: Actor,
+  id: string,
+): Promise<AttachmentEntity | null> {
+  return findWhole(manager, { id, communityId, addedBy: person.id });
 }
 
 async function findWhole(

@@ -9,12 +9,16 @@ import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { AttachmentPartEntity } from '../../db/entities/attachment-part.entity.js';
+import { isDuplicate } from '../../db/duplicate.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { personNames } from '../people/person-names.service.js';
-import { mayChange, mayReadAttachment } from './attachment-access.service.js';
+import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { expectKnownPeople } from '../sharing/known-people.service.js';
+import { mayRemove, type SeenAttachment } from './attachment-access.service.js';
 import { recordAttachment } from './attachment-audit.js';
 import {
   sha256Of,
@@ -25,7 +29,13 @@ import {
 } from './attachment-files.service.js';
 import { maySeeSubject } from './attachment-subjects.repository.js';
 import { toAttachment } from './attachments.mapper.js';
-import { attachmentsOf, lockAttachment, readable, sentBefore } from './attachments.repository.js';
+import {
+  attachmentsOf,
+  lockAttachment,
+  ownAttachment,
+  readable,
+  sentBefore,
+} from './attachments.repository.js';
 
 /** Recordings and pictures: adding, showing, removing. Their bytes go through AttachmentFilesService. */
 export class AttachmentsService {
@@ -37,39 +47,40 @@ export class AttachmentsService {
 
   async list(actor: Actor, subject: AttachmentSubject): Promise<Attachment[]> {
     const { manager } = this.dataSource;
-    const rows: AttachmentEntity[] = [];
-    for (const row of await attachmentsOf(manager, actor.communityId, subject)) {
-      if (await mayReadAttachment(manager, actor, row)) rows.push(row);
-    }
+    const viewer = await this.viewer(actor);
+    const seen = await attachmentsOf(manager, viewer, subject);
     const names = await personNames(
       manager,
-      rows.map(({ addedBy }) => addedBy),
+      seen.map(({ row }) => row.addedBy),
     );
-    return rows.map((row) => toAttachment(row, actor, names.get(row.addedBy) ?? ''));
+    return seen.map((each) => toAttachment(each, viewer, names.get(each.row.addedBy) ?? ''));
   }
 
   async read(actor: Actor, attachmentId: string): Promise<Attachment> {
     const { manager } = this.dataSource;
-    return describe(manager, actor, await readable(manager, actor, attachmentId));
+    const viewer = await this.viewer(actor);
+    return describe(manager, viewer, await readable(manager, viewer, attachmentId));
   }
 
   /** A picture, or a recording that begins with its spoken consent. Sent again, it is the one that is there. */
   async create(actor: Actor, input: AttachmentInput, file: IncomingFile): Promise<Attachment> {
     const { manager } = this.dataSource;
-    if (!(await maySeeSubject(manager, actor, input))) throw notFound();
+    if (!(await maySeeSubject(manager, await this.viewer(actor), input))) throw notFound();
     const before = await sentBefore(manager, actor, input.clientId);
-    if (before !== null) return describe(manager, actor, before);
+    if (before !== null) return this.describeOwn(actor, before);
+    await expectKnownPeople(manager, actor, input.sharing, input.giverId, '');
     await this.expectRoom(actor, input);
     const kept = await (input.kind === 'picture' ? this.files.keepPicture(file) : this.files.keepSound(file));
     const isNew = await this.orRemove([kept], () => this.insert(actor, input, kept));
-    // Two sendings of the same met: the other one's file is the one that counts.
+    // Two sendings of the same have met: the other one's file is the one that counts.
     if (!isNew) await this.files.remove([kept]);
-    const row = await sentBefore(manager, actor, input.clientId);
-    if (row === null) throw notFound();
-    return describe(manager, actor, row);
+    return this.describeOwn(actor, await sentBefore(manager, actor, input.clientId));
   }
 
-  /** The next part of the own recording. A part that is there already with the same content is fine. */
+  /**
+   * The next part of the own recording. A part that is there already with the same content is fine. Whoever brings what
+   * somebody else gives may send it to its end, also where it is not for them to hear.
+   */
   async addPart(
     actor: Actor,
     attachmentId: string,
@@ -77,33 +88,49 @@ export class AttachmentsService {
     file: IncomingFile,
   ): Promise<Attachment> {
     const { manager } = this.dataSource;
-    const row = await readable(manager, actor, attachmentId);
-    if (!mayChange(actor, row)) throw conflict('not-yours');
+    const row = await ownAttachment(manager, actor, attachmentId);
+    if (row === null) {
+      await readable(manager, await this.viewer(actor), attachmentId);
+      throw conflict('not-yours');
+    }
     if (row.kind !== 'recording') throw conflict('part-missing');
     const there = row.parts.find(({ part }) => part === input.part);
     if (there !== undefined) {
       if (there.sha256 !== (await sha256Of(file.path))) throw conflict('part-differs');
-      return describe(manager, actor, row);
+      return this.describeOwn(actor, row);
     }
     if (!row.parts.some(({ part }) => part === input.part - 1)) throw conflict('part-missing');
     const kept = await this.files.keepSound(file);
     const isNew = await this.orRemove([kept], () => this.insertPart(attachmentId, input, kept));
     if (!isNew) await this.files.remove([kept]);
-    return this.read(actor, attachmentId);
+    return this.describeOwn(actor, await ownAttachment(manager, actor, attachmentId));
   }
 
   /** Rows first, files once that is certain; what a failure in between leaves behind is swept away at the next start. */
   async remove(actor: Actor, attachmentId: string): Promise<void> {
-    const row = await readable(this.dataSource.manager, actor, attachmentId);
-    if (!mayChange(actor, row)) throw conflict('not-yours');
+    const viewer = await this.viewer(actor);
+    const seen = await readable(this.dataSource.manager, viewer, attachmentId);
+    if (!mayRemove(viewer, seen)) throw conflict('not-yours');
     const gone = await inTransaction(this.dataSource, async (manager) => {
       await lockAttachment(manager, attachmentId);
       const parts = await manager.findBy(AttachmentPartEntity, { attachmentId });
       await manager.delete(AttachmentEntity, { id: attachmentId });
-      await recordAttachment(manager, this.clock, actor, 'attachment-removed', row);
+      await recordAttachment(manager, this.clock, actor, 'attachment-removed', seen.row);
       return parts;
     });
     await this.files.remove(gone);
+  }
+
+  private viewer(actor: Actor): Promise<Viewer> {
+    return viewerOf(this.dataSource.manager, actor, this.clock.now());
+  }
+
+  /** What somebody has just sent, in their own words, whoever may see it from now on. */
+  private async describeOwn(actor: Actor, row: AttachmentEntity | null): Promise<Attachment> {
+    const { manager } = this.dataSource;
+    const shared = row === null ? undefined : (await sharedById(manager, 'attachment', [row.id])).get(row.id);
+    if (row === null || shared === undefined) throw notFound();
+    return describe(manager, await this.viewer(actor), { row, shared });
   }
 
   private async expectRoom(actor: Actor, subject: AttachmentSubject): Promise<void> {
@@ -118,15 +145,14 @@ export class AttachmentsService {
 
   /** False where the same sending has come in meanwhile. */
   private async insert(actor: Actor, input: AttachmentInput, kept: KeptFile | KeptPicture): Promise<boolean> {
-    const { level, ...fields } = input;
+    const { sharingLevel, sharing, giverId, ...fields } = input;
     const id = randomUUID();
-    return inTransaction(this.dataSource, async (manager) => {
-      if ((await sentBefore(manager, actor, input.clientId)) !== null) return false;
+    const { communityId } = actor;
+    const write = async (manager: EntityManager) => {
       const row = {
         id,
-        communityId: actor.communityId,
+        communityId,
         ...fields,
-        sharingLevel: level,
         widthPx: 'widthPx' in kept ? kept.widthPx : null,
         heightPx: 'heightPx' in kept ? kept.heightPx : null,
         addedBy: actor.person.id,
@@ -135,9 +161,23 @@ export class AttachmentsService {
       await manager.insert(AttachmentEntity, row);
       const part = input.kind === 'picture' ? 1 : 0;
       await manager.insert(AttachmentPartEntity, partRow(id, part, null, kept));
+      await insertSharing(manager, {
+        itemType: 'attachment',
+        itemId: id,
+        communityId,
+        level: sharingLevel,
+        details: sharing,
+        giverId: giverId ?? actor.person.id,
+      });
       await recordAttachment(manager, this.clock, actor, 'attachment-added', row);
+    };
+    try {
+      await inTransaction(this.dataSource, write);
       return true;
-    });
+    } catch (cause) {
+      if (isDuplicate(cause)) return false;
+      throw cause;
+    }
   }
 
   private async insertPart(attachmentId: string, input: PartInput, kept: KeptFile): Promise<boolean> {
@@ -168,9 +208,10 @@ function partRow(attachmentId: string, part: number, seconds: number | null, kep
 
 export async function describe(
   manager: EntityManager,
-  actor: Actor,
-  row: AttachmentEntity,
+  viewer: Viewer,
+  seen: SeenAttachment,
 ): Promise<Attachment> {
-  const names = await personNames(manager, [row.addedBy]);
-  return toAttachment(row, actor, names.get(row.addedBy) ?? '');
+  const { addedBy } = seen.row;
+  const names = await personNames(manager, [addedBy]);
+  return toAttachment(seen, viewer, names.get(addedBy) ?? '');
 }

@@ -1,7 +1,7 @@
 import type { AuditEvent } from '#shared/contracts/audit.js';
 import type { PageQuery } from '#shared/contracts/common.js';
 import type { DataSource } from 'typeorm';
-import { hasRole, type Actor } from '../../http/actor.js';
+import type { Actor } from '../../http/actor.js';
 import { invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { viewerOf } from '../../policy/viewer.js';
@@ -26,12 +26,7 @@ export class AuditListService {
   async list(actor: Actor, { cursor, limit = PAGE_LENGTH }: PageQuery): Promise<AuditPage> {
     if (cursor !== undefined && !/^\d{1,19}$/u.test(cursor)) throw invalidField('cursor', 'unknown');
     const { manager } = this.dataSource;
-    const reader = {
-      communityId: actor.communityId,
-      personId: actor.person.id,
-      isElder: hasRole(actor, 'elder'),
-    };
-    const rows = await auditPage(manager, reader, cursor ?? null, limit + 1);
+    const rows = await auditPage(manager, actor.communityId, cursor ?? null, limit + 1);
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const appears = await subjectAppearances(manager, viewer, rows);
     const page = rows.slice(0, limit).filter((row) => appears(row) !== 'none');

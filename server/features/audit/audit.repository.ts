@@ -1,4 +1,5 @@
-import { In, LessThan, Raw, type EntityManager } from 'typeorm';
+import { In, LessThan, type EntityManager } from 'typeorm';
+import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -14,27 +15,15 @@ import { personNames } from '../people/person-names.service.js';
 
 type SubjectType = AuditEventEntity['subjectType'];
 
-/** Rows about what is for the elders alone are for elders, and for whoever did it. */
-const FOR_EVERY_KEEPER = Raw(
-  (column) => `COALESCE(JSON_VALUE(${column}, '$.level'), 'village') IN ('open', 'village')`,
-);
-
 /** Newest first, from before the given sequence on. */
 export async function auditPage(
   manager: EntityManager,
-  reader: { communityId: string; personId: string; isElder: boolean },
+  communityId: string,
   before: string | null,
   limit: number,
 ): Promise<AuditEventEntity[]> {
-  const { communityId, personId, isElder } = reader;
-  const older = before === null ? { communityId } : { communityId, sequence: LessThan(before) };
   return manager.find(AuditEventEntity, {
-    where: isElder
-      ? older
-      : [
-          { ...older, details: FOR_EVERY_KEEPER },
-          { ...older, actorId: personId },
-        ],
+    where: before === null ? { communityId } : { communityId, sequence: LessThan(before) },
     order: { sequence: 'DESC' },
     take: limit,
   });
@@ -73,8 +62,13 @@ const NAMES: Readonly<
         ({ id, place, year }) => [id, `${place.name} ${year}`],
       ),
     ),
-  /** What it is called is for those who may hear or see it. */
-  attachment: () => Promise.resolve(new Map<string, string>()),
+  attachment: async (manager, ids) =>
+    new Map(
+      (await manager.findBy(AttachmentEntity, { id: In(ids) })).map(({ id, title, speaker }) => [
+        id,
+        title || speaker,
+      ]),
+    ),
   version: async (manager, ids) =>
     new Map(
       (
@@ -102,7 +96,7 @@ export async function subjectNames(
 }
 
 /** Subjects that have a level of their own. */
-const LEVELLED = ['entry', 'figure', 'note'] as const;
+const LEVELLED = ['entry', 'figure', 'note', 'attachment'] as const;
 
 /** How each row's subject appears to a person: what leaves no trace for them leaves none in the records either. */
 export async function subjectAppearances(

@@ -1,9 +1,10 @@
 import type { Calendar, CalendarInput } from '#shared/contracts/calendars.js';
 import { randomUUID } from 'node:crypto';
-import { In, QueryFailedError, type DataSource } from 'typeorm';
+import { In, type DataSource } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
+import { isDuplicate } from '../../db/duplicate.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor, type Person } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
@@ -110,10 +111,4 @@ export class CalendarsService {
     const sight = await entrySight(manager, await viewerOf(manager, actor, this.clock.now()), things);
     return things.filter((thing) => sight.appearance(thing) === 'full').length;
   }
-}
-
-function isDuplicate(error: unknown): boolean {
-  return (
-    error instanceof QueryFailedError && (error.driverError as { code?: unknown }).code === 'ER_DUP_ENTRY'
-  );
 }

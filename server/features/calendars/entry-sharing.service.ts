@@ -1,15 +1,14 @@
 import { type EntryInput } from '#shared/contracts/calendars.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import type { EntityManager } from 'typeorm';
-import { GroupMemberEntity } from '../../db/entities/group-member.entity.js';
 import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
-import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import { isKept, maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing } from '../../policy/sharing.repository.js';
 import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import type { Viewer } from '../../policy/viewer.js';
+import { expectKnownPeople } from '../sharing/known-people.service.js';
 
 /** How an entry is shared, as its content says it. */
 export function sharingOf({ sharingLevel, sharing }: EntryInput): Sharing {
@@ -39,7 +38,7 @@ export async function shareNewEntry(
 ): Promise<void> {
   const { level, details } = sharingOf(content);
   if (!hasRole(actor, 'officer') && !isKept({ level, details })) throw conflict('officers-write-this');
-  await expectKnownPeople(manager, actor, content, '');
+  await expectKnownPeople(manager, actor, details, content.giverId ?? null, '');
   const { communityId } = actor;
   const giverId = content.giverId ?? actor.person.id;
   await insertSharing(manager, { itemType: 'entry', itemId: entryId, communityId, level, details, giverId });
@@ -60,32 +59,6 @@ export async function shareChangedEntry(
     throw invalidField('content.giverId', 'only-the-giver');
   }
   if (!isTighterOrSame(row, after)) throw invalidField('content.sharingLevel', 'wider-needs-two');
-  await expectKnownPeople(manager, actor, content, 'content.');
+  await expectKnownPeople(manager, actor, after.details, content.giverId ?? null, 'content.');
   await manager.update(ItemSharingEntity, { itemType: 'entry', itemId: entryId }, { ...after, giverId });
-}
-
-/** Groups, givers and successors are of this village; nobody hands a thing to a group that they are not in. */
-async function expectKnownPeople(
-  manager: EntityManager,
-  { communityId, person }: Actor,
-  content: EntryInput,
-  prefix: string,
-): Promise<void> {
-  const { groupId, successorId } = content.sharing ?? PLAIN_DETAILS;
-  if (groupId !== null) {
-    const groups = await manager.findBy(GroupMemberEntity, { groupId, group: { communityId } });
-    const people = groups.map(({ personId }) => personId);
-    if (![person.id, content.giverId].some((id) => typeof id === 'string' && people.includes(id))) {
-      throw invalidField(`${prefix}sharing.groupId`, 'group-of-giver');
-    }
-  }
-  for (const [field, personId] of [
-    ['giverId', content.giverId ?? null],
-    ['sharing.successorId', successorId],
-  ] as const) {
-    if (personId === null) continue;
-    if (!(await manager.existsBy(MembershipEntity, { communityId, personId }))) {
-      throw invalidField(`${prefix}${field}`, 'not-of-this-village');
-    }
-  }
 }

@@ -4,13 +4,14 @@ import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { ConsentEntity } from '../../db/entities/consent.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
+import type { Member } from '../../policy/viewer.js';
 import { conflict, invalidField } from '../../http/app-error.js';
 import { isOpen } from '../../policy/consents.js';
 import type { ConsentThing } from './consent-things.service.js';
 
 /** The giver, whoever gave the thing itself, and those who compile, review and sign, of what they see. */
 export function mayOf(
-  actor: Actor,
+  actor: Member,
   row: Pick<ConsentEntity, 'giverId' | 'state'>,
   thing: ConsentThing,
 ): ConsentLine['may'] {
@@ -20,15 +21,15 @@ export function mayOf(
   return { read, change: read, withdraw: isYes && (read || hasRole(actor, 'steward')) };
 }
 
-export function mayAsk(actor: Actor, thing: ConsentThing): boolean {
+export function mayAsk(actor: Member, thing: ConsentThing): boolean {
   return thing.shared.giverId === actor.person.id || (thing.isSeen && keeps(actor));
 }
 
-function keeps(actor: Actor): boolean {
+function keeps(actor: Member): boolean {
   return hasRole(actor, 'officer', 'steward', 'elder');
 }
 
-function isGiver(actor: Actor, { giverId }: Pick<ConsentEntity, 'giverId'>, { shared }: ConsentThing) {
+function isGiver(actor: Member, { giverId }: Pick<ConsentEntity, 'giverId'>, { shared }: ConsentThing) {
   return giverId === actor.person.id || shared.giverId === actor.person.id;
 }
 

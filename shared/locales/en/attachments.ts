@@ -12,11 +12,16 @@ export const texts = {
     level: 'Who may hear it?',
     next: 'On to the spoken agreement',
   },
-  level: {
+  circle: {
     elders: 'The elders',
-    eldersNote: 'Elders of this village, and you.',
+    eldersNote: 'The elders of this village and its giver. Nobody else learns that it is there.',
     village: 'The village',
     villageNote: 'Everybody of this village who may see what it belongs to.',
+    more: 'Another circle, a season, or how its giver is named',
+  },
+  somebody: {
+    role: 'an elder or a keeper',
+    'not-named': 'somebody who is not named',
   },
   consent: {
     title: 'First the agreement',
@@ -87,6 +92,7 @@ export const texts = {
   card: {
     recording: 'Recording of {{speaker}}',
     when: 'Added by {{name}}, {{moment}}',
+    whenOnly: 'Added {{moment}}',
     parts_one: '{{count}} part, {{length}}',
     parts_other: '{{count}} parts, {{length}}',
     consentOf: 'The agreement',
@@ -134,7 +140,6 @@ export const texts = {
     asked: 'People, and they were asked and agree',
     nobodyShown: 'Nobody can be made out',
     level: 'Who may see it?',
-    villageNote: 'Everybody of this village who may see what it belongs to.',
     keep: 'Keep it',
     tooLarge: 'This picture has {{size}} MB. Choose one of at most {{megabytes}} MB.',
     notAPicture: 'This is no picture that can be shown here. Choose a JPEG, PNG or WebP.',

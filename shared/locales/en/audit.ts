@@ -26,7 +26,6 @@ export const texts = {
     'figure-taken-out': '{{actor}} took the figure {{subject}} out.',
     'figure-put-back': '{{actor}} put the figure {{subject}} back.',
     'attachment-added': '{{actor}} added {{what}}.',
-    'attachment-opened': '{{actor}} opened {{what}} that is not for everybody.',
     'attachment-words-written': '{{actor}} wrote out the words of {{what}}.',
     'attachment-removed': '{{actor}} removed {{what}}.',
     'group-founded': '{{actor}} founded the group {{subject}}.',

@@ -1,14 +1,15 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import { ATTACHMENT_LEVELS, DEFAULT_LEVEL, type AttachmentLevel } from '#shared/contracts/attachments.js';
+import { DEFAULT_SHARING } from '#shared/contracts/attachments.js';
 import { communityQuery } from '#src/lib/calendar-queries.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
-import { PickGroup } from '#src/ui/pick.js';
+import type { SharingOfAttachment } from '../model/kept-recordings.js';
 import type { Recorder } from '../model/use-recorder.js';
+import { CircleFields } from './circle-fields.js';
 
 /** Who speaks, in which language, and who may hear it. */
 export function AboutStep({ recorder, communityId }: { recorder: Recorder; communityId: string }) {
@@ -18,8 +19,13 @@ export function AboutStep({ recorder, communityId }: { recorder: Recorder; commu
   const languages = community ? [community.villageLanguage, community.officerLanguage] : [];
   const [speaker, setSpeaker] = useState(useSession().person?.displayName ?? '');
   const [language, setLanguage] = useState<string | null>(null);
-  const [level, setLevel] = useState<AttachmentLevel>(DEFAULT_LEVEL.recording);
-  const [isMissing, setIsMissing] = useState(false);
+  const [circle, setCircle] = useState<SharingOfAttachment>({
+    sharingLevel: DEFAULT_SHARING.recording.level,
+    sharing: DEFAULT_SHARING.recording.details,
+    giverId: null,
+  });
+  const [isChecked, setIsChecked] = useState(false);
+  const needsGroup = circle.sharingLevel === 'group' && circle.sharing.groupId === null;
   const chosen = language ?? languages[0]?.tag ?? '';
   return (
     <form
@@ -27,9 +33,9 @@ export function AboutStep({ recorder, communityId }: { recorder: Recorder; commu
       noValidate
       onSubmit={(event) => {
         event.preventDefault();
-        setIsMissing(speaker.trim() === '');
-        if (speaker.trim() !== '' && chosen !== '') {
-          void recorder.tellAbout({ speaker: speaker.trim(), language: chosen, level });
+        setIsChecked(true);
+        if (speaker.trim() !== '' && chosen !== '' && !needsGroup) {
+          void recorder.tellAbout({ speaker: speaker.trim(), language: chosen, ...circle });
         }
       }}
     >
@@ -39,7 +45,7 @@ export function AboutStep({ recorder, communityId }: { recorder: Recorder; commu
         value={speaker}
         maxLength={80}
         autoComplete="off"
-        problem={isMissing ? words.field('required') : undefined}
+        problem={isChecked && speaker.trim() === '' ? words.field('required') : undefined}
         onChange={(event) => {
           setSpeaker(event.currentTarget.value);
         }}
@@ -57,16 +63,11 @@ export function AboutStep({ recorder, communityId }: { recorder: Recorder; commu
           </option>
         ))}
       </SelectField>
-      <PickGroup
+      <CircleFields
         label={t('about.level')}
-        stacked
-        value={level}
-        options={ATTACHMENT_LEVELS.map((value) => ({
-          value,
-          label: t(`level.${value}`),
-          note: t(`level.${value}Note`),
-        })).reverse()}
-        onChange={setLevel}
+        value={circle}
+        groupProblem={isChecked && needsGroup ? words.field('choose-group') : undefined}
+        onChange={setCircle}
       />
       <Button type="submit" look="main" full>
         {t('about.next')}

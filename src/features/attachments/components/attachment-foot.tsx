@@ -11,13 +11,14 @@ import { useRemoveAttachment } from '../api/attachments-api.js';
 
 /** Who added it, who may see it, and the way to take it away for good. */
 export function AttachmentFoot({ attachment }: { attachment: Attachment }) {
-  const { t } = useTranslation(['attachments', 'common']);
+  const { t } = useTranslation(['attachments', 'common', 'sharing']);
   const { moment } = useDateWords();
   const say = useToast();
   const words = useProblemWords();
   const remove = useRemoveAttachment();
   const [isAsking, setIsAsking] = useState(false);
-  const { id, addedBy, addedAt, level, may } = attachment;
+  const { id, addedBy, addedAt, sharingLevel, may } = attachment;
+  const when = { name: addedBy, moment: moment(addedAt) };
   const removeIt = async () => {
     try {
       await remove.mutateAsync(id);
@@ -30,7 +31,8 @@ export function AttachmentFoot({ attachment }: { attachment: Attachment }) {
   return (
     <div className="flex flex-wrap items-center justify-between gap-2">
       <p className="text-small text-umber-soft">
-        {t('card.when', { name: addedBy, moment: moment(addedAt) })} · {t(`level.${level}`)}
+        {addedBy === '' ? t('card.whenOnly', when) : t('card.when', when)} ·{' '}
+        {t(`sharing:level.${sharingLevel}.name`)}
       </p>
       {may.remove && (
         <Button

@@ -2,10 +2,8 @@ import { ImagePlus, Send } from 'lucide-react';
 import { useEffect, useId, useRef, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import {
-  ATTACHMENT_LEVELS,
-  DEFAULT_LEVEL,
+  DEFAULT_SHARING,
   PICTURE_MAX_BYTES,
-  type AttachmentLevel,
   type AttachmentSubject,
   type ConsentWay,
 } from '#shared/contracts/attachments.js';
@@ -17,9 +15,11 @@ import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { beginAttachment } from '../api/attachment-uploads.js';
 import { useLookAgain } from '../api/attachments-api.js';
+import type { SharingOfAttachment } from '../model/kept-recordings.js';
 import { newId } from '../model/new-id.js';
 import { useChosenPicture } from '../model/use-chosen-picture.js';
 import { useSending } from '../model/use-sending.js';
+import { CircleFields } from './circle-fields.js';
 import { SendingLine } from './sending-line.js';
 
 interface PictureFormProps {
@@ -32,6 +32,7 @@ interface Problems {
   picture?: string | undefined;
   title?: string | undefined;
   consent?: string | undefined;
+  group?: string | undefined;
 }
 
 const MEGABYTE = 1024 * 1024;
@@ -49,7 +50,11 @@ export function PictureForm({ communityId, subject, onDone }: PictureFormProps) 
   const [clientId] = useState(newId);
   const [title, setTitle] = useState('');
   const [consent, setConsent] = useState<(typeof ANSWERS)[number] | null>(null);
-  const [level, setLevel] = useState<AttachmentLevel>(DEFAULT_LEVEL.picture);
+  const [circle, setCircle] = useState<SharingOfAttachment>({
+    sharingLevel: DEFAULT_SHARING.picture.level,
+    sharing: DEFAULT_SHARING.picture.details,
+    giverId: null,
+  });
   const [isChecked, setIsChecked] = useState(false);
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => {
@@ -57,8 +62,8 @@ export function PictureForm({ communityId, subject, onDone }: PictureFormProps) 
   }, []);
   const sending = useSending(async (watch) => {
     if (picture === null || consent === null) return null;
-    const input = { clientId, kind: 'picture', title, speaker: '', language: null, consent, level } as const;
-    return beginAttachment(communityId, { ...input, ...subject }, picture, watch);
+    const input = { clientId, kind: 'picture', title, speaker: '', language: null, consent } as const;
+    return beginAttachment(communityId, { ...input, ...circle, ...subject }, picture, watch);
   });
   const megabytes = PICTURE_MAX_BYTES / MEGABYTE;
   const problems: Problems = {
@@ -72,6 +77,10 @@ export function PictureForm({ communityId, subject, onDone }: PictureFormProps) 
             : undefined,
     title: title.trim() === '' ? words.field('required') : undefined,
     consent: consent === null ? t('picture.chooseOne') : undefined,
+    group:
+      circle.sharingLevel === 'group' && circle.sharing.groupId === null
+        ? words.field('choose-group')
+        : undefined,
   };
   const isWhole = Object.values(problems).every((each) => each === undefined);
   const shown: Problems = isChecked ? problems : { picture: problem === null ? undefined : problems.picture };
@@ -141,16 +150,11 @@ export function PictureForm({ communityId, subject, onDone }: PictureFormProps) 
         }))}
         onChange={setConsent}
       />
-      <PickGroup
+      <CircleFields
         label={t('picture.level')}
-        stacked
-        value={level}
-        options={ATTACHMENT_LEVELS.map((value) => ({
-          value,
-          label: t(`level.${value}`),
-          note: t(value === 'village' ? 'picture.villageNote' : 'level.eldersNote'),
-        }))}
-        onChange={setLevel}
+        value={circle}
+        groupProblem={shown.group}
+        onChange={setCircle}
       />
       <SendingLine sending={sending} stoppedWords={t('sending.stoppedPicture')} />
       {sending.share === null && (

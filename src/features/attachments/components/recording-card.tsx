@@ -10,7 +10,9 @@ import { WordsPart } from './words-part.js';
 /** One recording: listen, read what was said, hear the agreement. */
 export function RecordingCard({ attachment }: { attachment: Attachment }) {
   const { t } = useTranslation('attachments');
-  const { id, title, speaker, language, parts } = attachment;
+  const { id, title, language, naming, parts } = attachment;
+  const speaker =
+    attachment.speaker === '' && naming !== 'named' ? t(`somebody.${naming}`) : attachment.speaker;
   const sources = parts.map(({ part, seconds }) => ({
     part,
     source: partUrl(id, part),

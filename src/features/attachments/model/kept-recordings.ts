@@ -1,15 +1,17 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
-import type { AttachmentLevel, AttachmentSubject } from '#shared/contracts/attachments.js';
+import type { AttachmentInput, AttachmentSubject } from '#shared/contracts/attachments.js';
+
+/** Who may see it, and whose it is. */
+export type SharingOfAttachment = Pick<AttachmentInput, 'sharingLevel' | 'sharing' | 'giverId'>;
 
 /** A recording that is on this device and has not been sent. */
-export interface KeptRecording extends AttachmentSubject {
+export interface KeptRecording extends AttachmentSubject, SharingOfAttachment {
   clientId: string;
   personId: string;
   communityId: string;
   title: string;
   speaker: string;
   language: string;
-  level: AttachmentLevel;
   mimeType: string;
   /** ISO instant. */
   beganAt: string;

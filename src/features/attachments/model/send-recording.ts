@@ -43,7 +43,8 @@ export async function sendRecording(
 }
 
 function inputOf(kept: KeptRecording): AttachmentInput {
-  const { clientId, subjectType, subjectId, title, speaker, language, level } = kept;
+  const { clientId, subjectType, subjectId, title, speaker, language } = kept;
+  const { sharingLevel, sharing, giverId } = kept;
   return {
     clientId,
     kind: 'recording',
@@ -53,6 +54,8 @@ function inputOf(kept: KeptRecording): AttachmentInput {
     speaker,
     language,
     consent: 'clip',
-    level,
+    sharingLevel,
+    sharing,
+    giverId,
   };
 }

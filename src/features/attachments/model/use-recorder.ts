@@ -1,5 +1,5 @@
 import { useCallback, useState } from 'react';
-import type { AttachmentLevel, AttachmentSubject } from '#shared/contracts/attachments.js';
+import type { AttachmentSubject } from '#shared/contracts/attachments.js';
 import {
   dropPart,
   dropRecording,
@@ -7,6 +7,7 @@ import {
   keptParts,
   type KeptPart,
   type KeptRecording,
+  type SharingOfAttachment,
 } from './kept-recordings.js';
 import { newId } from './new-id.js';
 import { useMicrophone, type Microphone } from './use-microphone.js';
@@ -15,10 +16,9 @@ import { recordingType } from './voice-chain.js';
 /** Where one is: who speaks, the spoken agreement, the recording, listening to it. */
 export type RecorderStep = 'about' | 'consent' | 'voice' | 'listen';
 
-export interface About {
+export interface About extends SharingOfAttachment {
   speaker: string;
   language: string;
-  level: AttachmentLevel;
 }
 
 export interface Recorder {
