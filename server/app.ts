@@ -54,6 +54,7 @@ import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
 import { SessionService } from './features/session/session.service.js';
 import { erasersOf } from './features/withdrawals/erasers.service.js';
+import { ItemStatesService } from './features/withdrawals/item-states.service.js';
 import { WithdrawalsService } from './features/withdrawals/withdrawals.service.js';
 import { withdrawalsRoutes } from './features/withdrawals/withdrawals.routes.js';
 import type { WithdrawalList } from './storage/withdrawal-list.js';
@@ -211,7 +212,11 @@ export function createApp(options: AppOptions): App {
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
   const erasers = erasersOf(attachmentFiles, clock);
-  withdrawalsRoutes(mount, new WithdrawalsService(dataSource, clock, erasers, options.withdrawals));
+  withdrawalsRoutes(
+    mount,
+    new WithdrawalsService(dataSource, clock, erasers, options.withdrawals),
+    new ItemStatesService(dataSource, clock),
+  );
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
   consentsRoutes(mount, consents, new ConsentCardService(dataSource, consents));
   auditRoutes(mount, new AuditListService(dataSource, clock));

@@ -42,6 +42,10 @@ export type SheetToReplace = z.infer<typeof sheetToReplace>;
 export const itemState = z.strictObject({
   state: z.enum(['shared', 'paused']),
   pausedAt: instant.nullable(),
+  /** Null for whoever could not see the thing itself: a steward takes back what they never read. */
+  title: z.string().nullable(),
+  /** Whether it is this person’s own: nobody else is then asked for. */
+  isMine: z.boolean(),
   may: z.strictObject({
     withdraw: z.boolean(),
     pause: z.boolean(),
@@ -50,6 +54,18 @@ export const itemState = z.strictObject({
   }),
 });
 export type ItemState = z.infer<typeof itemState>;
+
+/** Hidden for now; this person may bring it back. */
+export const pausedItem = z.strictObject({
+  itemType: z.enum(SHARED_ITEM_TYPES),
+  itemId: id,
+  /** Null where this person could not see it while it was shared. */
+  title: z.string().nullable(),
+  pausedAt: instant,
+  /** Until when others than its giver can bring it back. */
+  othersUntil: instant,
+});
+export type PausedItem = z.infer<typeof pausedItem>;
 
 const communityParams = z.strictObject({ communityId: id });
 const itemParams = z.strictObject({ communityId: id, itemType: z.enum(SHARED_ITEM_TYPES), itemId: id });
@@ -98,6 +114,15 @@ export const withdrawalsEndpoints = {
     summary: 'Take the giver’s name off a thing, in the draft and in every version',
     access: member('community', ...ROLES),
     params: itemParams,
+  }),
+  listPaused: defineEndpoint({
+    id: 'listPausedItems',
+    method: 'GET',
+    path: '/api/communities/:communityId/paused',
+    summary: 'What is hidden for now and this person may bring back, newest first',
+    access: member('community', ...ROLES),
+    params: communityParams,
+    response: listOf(pausedItem),
   }),
   listWithdrawn: defineEndpoint({
     id: 'listWithdrawn',

@@ -23,6 +23,7 @@ import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
 import { texts as today } from './en/today.js';
 import { texts as versions } from './en/versions.js';
+import { texts as withdrawals } from './en/withdrawals.js';
 
 /**
  * English is complete and the measure for every other language: another language is a folder with the same
@@ -54,6 +55,7 @@ export const en = {
   sky,
   today,
   versions,
+  withdrawals,
 } as const;
 
 export type Namespace = keyof typeof en;

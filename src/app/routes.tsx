@@ -21,12 +21,16 @@ export const doorRoutes: readonly AppRoute[] = [
 
 /** Screens that work for a signed-in person without any village. */
 export const personRoutes: readonly AppRoute[] = [
-  { path: PATTERNS.account, texts: ['session', 'letters'], load: () => import('./routes/account.js') },
+  {
+    path: PATTERNS.account,
+    texts: ['session', 'letters', 'withdrawals'],
+    load: () => import('./routes/account.js'),
+  },
 ];
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
-  { path: PATTERNS.today, texts: ['today', 'sky'], load: () => import('./routes/today.js') },
+  { path: PATTERNS.today, texts: ['today', 'sky', 'withdrawals'], load: () => import('./routes/today.js') },
   { path: PATTERNS.look, texts: ['look', 'sky'], load: () => import('./routes/look.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
   { path: PATTERNS.moons, texts: ['moons', 'sky'], load: () => import('./routes/moons.js') },
@@ -97,6 +101,11 @@ export const villageRoutes: readonly AppRoute[] = [
     path: PATTERNS.villageRecords,
     texts: ['audit', 'people'],
     load: () => import('./routes/village-records.js'),
+  },
+  {
+    path: PATTERNS.takeBack,
+    texts: ['withdrawals', 'sharing'],
+    load: () => import('./routes/take-back.js'),
   },
   { path: PATTERNS.villageSettings, texts: ['people'], load: () => import('./routes/village-settings.js') },
 ];

@@ -56,3 +56,14 @@ export function forgetAll(keyStart: string): void {
     // See forget().
   }
 }
+
+/** Forgets every kept thing whose key says so. */
+export function forgetWhere(isGone: (key: string) => boolean): void {
+  try {
+    for (const key of Object.keys(localStorage)) {
+      if (key.startsWith(PREFIX) && isGone(key.slice(PREFIX.length))) localStorage.removeItem(key);
+    }
+  } catch {
+    // See forget().
+  }
+}

@@ -1,3 +1,5 @@
+import type { SharedItemType } from '#shared/contracts/sharing.js';
+
 /** Every address of the application, in one place. `pattern` is for the router, the rest for links. */
 export const PATTERNS = {
   today: '/',
@@ -32,6 +34,7 @@ export const PATTERNS = {
   review: '/calendars/:calendarId/versions/:number/review',
   compare: '/calendars/:calendarId/compare',
   sheet: '/calendars/:calendarId/sheet',
+  takeBack: '/take-back/:communityId/:itemType/:itemId',
 } as const;
 
 type VersionNumber = number | 'draft';
@@ -108,6 +111,8 @@ export const paths = {
     withQuery(`${calendarPath(calendarId)}/compare`, query),
   sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/sheet`, query),
+  takeBack: (communityId: string, itemType: SharedItemType, itemId: string) =>
+    `/take-back/${encodeURIComponent(communityId)}/${itemType}/${encodeURIComponent(itemId)}`,
 } as const;
 
 /** Where a person goes after signing in: a page of ours, never another site's address. */

@@ -7,7 +7,7 @@ import { replayWithdrawals } from '#server/features/withdrawals/replay.service.j
 import { AttachmentFilesService } from '#server/features/attachments/attachment-files.service.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
-import type { ItemState, SheetToReplace } from '#shared/contracts/withdrawals.js';
+import type { ItemState, PausedItem, SheetToReplace } from '#shared/contracts/withdrawals.js';
 import { addPicture } from '#tests/support/attachment-api.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
@@ -275,6 +275,43 @@ describe('a paused thing', () => {
     await resume(elder).expect(204);
   });
 
+  it('stands in the list of those who may bring it back, by its name where they could see it, and in no other', async () => {
+    await pause(village.elder).expect(204);
+    const staff = await api.signIn('staff');
+    expect(await paused(village.officer)).toMatchObject([
+      { itemType: 'entry', itemId: entry.id, title: entry.content.titleOfficer },
+    ]);
+    expect(await paused(staff)).toEqual([]);
+    api.clock.set(new Date('2026-12-31T06:00:01Z'));
+    expect(await paused(await api.signIn('officer'))).toEqual([]);
+    expect(await paused(await api.signIn('elder'))).toHaveLength(1);
+  });
+
+  it('that leaves no trace stands in no list of those who could not see it, steward or not', async () => {
+    const sealed = await addEntry(village.elder2, calendarId, { sharingLevel: 'sealed', titleOfficer: WORD });
+    const path = `/api/communities/${village.elder2.communityId}/items/entry/${sealed.id}/pause`;
+    await village.elder2.post(path, { askedById: null }).expect(204);
+    expect(await paused(village.steward)).toEqual([]);
+    expect(await paused(village.elder2)).toMatchObject([{ itemId: sealed.id, title: WORD }]);
+  });
+
+  it('is known to a steward who takes it back unseen without its name', async () => {
+    const kept = await addEntry(village.elder2, calendarId, { sharingLevel: 'elders', titleOfficer: WORD });
+    const path = `/api/communities/${village.steward.communityId}/items/entry/${kept.id}/state`;
+    const seen = (client: Client) => client.get(path).expect(200);
+    expect((await seen(village.steward)).body).toMatchObject({
+      ...{ title: null, isMine: false },
+      may: { withdraw: true },
+    });
+    expect((await seen(village.elder2)).body).toMatchObject({ title: WORD, isMine: true });
+  });
+
+  const paused = async (client: Client) =>
+    (
+      (await client.get(`/api/communities/${client.communityId}/paused`).expect(200)).body as {
+        items: PausedItem[];
+      }
+    ).items;
   const itemPath = (client: Client) => `/api/communities/${client.communityId}/items/entry/${entry.id}`;
   const pause = (client: Client) => client.post(`${itemPath(client)}/pause`, { askedById: null });
   const resume = (client: Client) => client.delete(`${itemPath(client)}/pause`);

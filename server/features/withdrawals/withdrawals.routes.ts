@@ -1,11 +1,16 @@
 import { withdrawalsEndpoints } from '#shared/contracts/withdrawals.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
+import type { ItemStatesService } from './item-states.service.js';
 import type { WithdrawalsService } from './withdrawals.service.js';
 
-export function withdrawalsRoutes(mount: Mount, withdrawals: WithdrawalsService): void {
+export function withdrawalsRoutes(
+  mount: Mount,
+  withdrawals: WithdrawalsService,
+  states: ItemStatesService,
+): void {
   mount.forMember(withdrawalsEndpoints.readState, ({ params }, actor) =>
-    withdrawals.readState(actor, params.itemType, params.itemId),
+    states.read(actor, params.itemType, params.itemId),
   );
   mount.forMember(withdrawalsEndpoints.withdraw, async ({ params, body }, actor) => {
     await withdrawals.withdraw(actor, params.itemType, params.itemId, body);
@@ -23,6 +28,9 @@ export function withdrawalsRoutes(mount: Mount, withdrawals: WithdrawalsService)
     await withdrawals.takeNameOff(actor, params.itemType, params.itemId);
     return undefined;
   });
+  mount.forMember(withdrawalsEndpoints.listPaused, async (_call, actor) =>
+    wholeList(await states.listPaused(actor)),
+  );
   mount.forMember(withdrawalsEndpoints.listWithdrawn, async (_call, actor) =>
     wholeList(await withdrawals.listGone(actor)),
   );

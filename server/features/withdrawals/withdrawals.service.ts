@@ -1,13 +1,11 @@
 import type { SharedItemType } from '#shared/contracts/sharing.js';
 import {
-  PAUSE_DAYS,
   WITHDRAWN_LISTED_DAYS,
-  type ItemState,
   type SheetToReplace,
   type WithdrawalInput,
   type WithdrawnItem,
 } from '#shared/contracts/withdrawals.js';
-import { addDays, subDays } from 'date-fns';
+import { subDays } from 'date-fns';
 import { randomUUID } from 'node:crypto';
 import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -15,11 +13,10 @@ import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { WithdrawalEntity } from '../../db/entities/withdrawal.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import { hasRole, type Actor } from '../../http/actor.js';
+import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { appearance, isKept, maySee } from '../../policy/policy.js';
-import { lockSharing } from '../../policy/sharing.repository.js';
+import { isKept } from '../../policy/policy.js';
 import { viewerOf } from '../../policy/viewer.js';
 import type { WithdrawalList } from '../../storage/withdrawal-list.js';
 import { recordAudit } from '../audit/audit.service.js';
@@ -27,6 +24,7 @@ import { takeNameOffDraft } from '../calendars/entry-eraser.service.js';
 import { takeNamesOffTellings } from '../figures/figure-eraser.service.js';
 import { takeNameOffFrozen } from '../versions/frozen-eraser.service.js';
 import type { Eraser } from './eraser.service.js';
+import { couldSee, lockOwn, mayResume } from './taking-back.service.js';
 import { vanish } from './vanishing.service.js';
 
 type Action = 'item-withdrawn' | 'item-paused' | 'item-resumed' | 'name-taken-off';
@@ -49,7 +47,7 @@ export class WithdrawalsService {
     const at = this.clock.now();
     const { communityId } = actor;
     const vanished = await inTransaction(this.dataSource, async (manager) => {
-      const row = await this.own(manager, actor, itemType, itemId);
+      const row = await lockOwn(manager, actor, this.clock.now(), { itemType, itemId });
       if (row.state === 'withdrawn') return null;
       await expectOfVillage(manager, actor, askedById);
       await this.record(manager, actor, row, 'item-withdrawn', askedById);
@@ -77,7 +75,7 @@ export class WithdrawalsService {
     askedById: string | null,
   ): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
-      const row = await this.own(manager, actor, itemType, itemId);
+      const row = await lockOwn(manager, actor, this.clock.now(), { itemType, itemId });
       if (row.state !== 'shared') return;
       await expectOfVillage(manager, actor, askedById);
       await this.setState(manager, row, 'paused');
@@ -87,7 +85,7 @@ export class WithdrawalsService {
 
   async resume(actor: Actor, itemType: SharedItemType, itemId: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
-      const row = await this.own(manager, actor, itemType, itemId);
+      const row = await lockOwn(manager, actor, this.clock.now(), { itemType, itemId });
       if (row.state !== 'paused') throw conflict('not-paused');
       if (!mayResume(actor, row, this.clock.now())) throw conflict('pause-over');
       await this.setState(manager, row, 'shared');
@@ -98,7 +96,7 @@ export class WithdrawalsService {
   /** In the draft, in every version and beside every telling; who may see the thing and to whom it belongs stays. */
   async takeNameOff(actor: Actor, itemType: SharedItemType, itemId: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
-      const row = await this.own(manager, actor, itemType, itemId);
+      const row = await lockOwn(manager, actor, this.clock.now(), { itemType, itemId });
       if (row.state === 'withdrawn') throw notFound();
       if (itemType === 'entry') {
         await takeNameOffDraft(manager, itemId);
@@ -108,27 +106,6 @@ export class WithdrawalsService {
       await manager.update(ItemSharingEntity, { itemType, itemId }, { details });
       await this.record(manager, actor, row, 'name-taken-off', null);
     });
-  }
-
-  async readState(actor: Actor, itemType: SharedItemType, itemId: string): Promise<ItemState> {
-    const { manager } = this.dataSource;
-    const row = await manager.findOneBy(ItemSharingEntity, { itemType, itemId });
-    const viewer = await viewerOf(manager, actor, this.clock.now());
-    const known = row !== null && row.communityId === actor.communityId && row.state !== 'withdrawn';
-    if (!known) throw notFound();
-    const mine = await this.mayTakeBack(manager, actor, row);
-    if (!mine && !maySee(viewer, row)) throw notFound();
-    const shared = row.state === 'shared';
-    return {
-      state: shared ? 'shared' : 'paused',
-      pausedAt: shared ? null : (row.stateAt?.toISOString() ?? null),
-      may: {
-        withdraw: mine,
-        pause: mine && shared,
-        resume: mine && !shared && mayResume(actor, row, this.clock.now()),
-        takeNameOff: mine && row.details.naming !== 'not-named',
-      },
-    };
   }
 
   /** What this person could see while it was shared, or what is theirs; newest first. */
@@ -144,7 +121,7 @@ export class WithdrawalsService {
       order: { stateAt: 'DESC', itemId: 'ASC' },
     });
     return rows
-      .filter((row) => appearance(viewer, { ...row, state: 'shared' }) === 'full')
+      .filter((row) => couldSee(viewer, row))
       .map(({ itemType, itemId, stateAt }) => ({ itemType, itemId, at: stateAt?.toISOString() ?? '' }));
   }
 
@@ -181,29 +158,6 @@ export class WithdrawalsService {
     if (affected === 0) throw notFound();
   }
 
-  /** A thing that this person may take back; anything else is not there, or not theirs. */
-  private async own(
-    manager: EntityManager,
-    actor: Actor,
-    itemType: SharedItemType,
-    itemId: string,
-  ): Promise<ItemSharingEntity> {
-    const row = await lockSharing(manager, itemType, itemId);
-    if (row?.communityId !== actor.communityId) throw notFound();
-    if (await this.mayTakeBack(manager, actor, row)) return row;
-    const viewer = await viewerOf(manager, actor, this.clock.now());
-    throw maySee(viewer, row) ? conflict('not-the-giver') : notFound();
-  }
-
-  /** Giver and successor; elders of what they see; steward and officer for whoever asks them, whatever the level. */
-  private async mayTakeBack(manager: EntityManager, actor: Actor, row: ItemSharingEntity): Promise<boolean> {
-    const { giverId, details } = row;
-    if (giverId === actor.person.id || details.successorId === actor.person.id) return true;
-    if (hasRole(actor, 'steward', 'officer')) return true;
-    if (!hasRole(actor, 'elder')) return false;
-    return maySee(await viewerOf(manager, actor, this.clock.now()), { ...row, state: 'shared' });
-  }
-
   private async setState(
     manager: EntityManager,
     { itemType, itemId }: ItemSharingEntity,
@@ -229,10 +183,6 @@ export class WithdrawalsService {
       details: askedBy === null ? {} : { askedBy },
     });
   }
-}
-
-function mayResume(actor: Actor, { giverId, stateAt }: ItemSharingEntity, now: Date): boolean {
-  return giverId === actor.person.id || (stateAt !== null && now <= addDays(stateAt, PAUSE_DAYS));
 }
 
 async function expectOfVillage(

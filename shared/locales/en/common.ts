@@ -14,6 +14,9 @@ export const texts = {
     who: '{{name}}, {{roles}}',
   },
 
+  takeBack: 'Take back or hide',
+  takeBackAbout: 'Take back or hide: {{about}}',
+
   undo: 'Undo',
   close: 'Close',
   cancel: 'Leave it as it is',

@@ -3,6 +3,7 @@ import { AttachmentsPanel } from '#src/features/attachments/components/attachmen
 import { SharingPanel } from '#src/features/sharing/components/sharing-panel.js';
 import type { SharingValue } from '#src/lib/sharing-fields.js';
 import type { ItemRef } from '#src/lib/sharing-queries.js';
+import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { Board } from '#src/ui/surfaces.js';
 
 export interface AboutItemProps {
@@ -12,7 +13,7 @@ export interface AboutItemProps {
   onHidden?: (() => void) | undefined;
 }
 
-/** What belongs to a thing besides its own words, wherever it is shown: voices and pictures, who may see it. */
+/** What belongs to a thing besides its own words, wherever it is shown: voices and pictures, who may see it, and the way to take it back. */
 export function AboutItem({ item, ...sharing }: AboutItemProps) {
   const { t } = useTranslation('sharing');
   const { communityId, itemType, itemId } = item;
@@ -25,6 +26,9 @@ export function AboutItem({ item, ...sharing }: AboutItemProps) {
       />
       <Board title={t('title')}>
         <SharingPanel key={itemId} item={item} {...sharing} />
+        <div className="mt-3">
+          <TakeBackLink {...item} />
+        </div>
       </Board>
     </>
   );

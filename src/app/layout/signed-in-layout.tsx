@@ -12,6 +12,7 @@ import { EmptyState } from '#src/ui/waiting.js';
 import type { RouteHandle } from '../router.js';
 import { Frame } from './frame.js';
 import { Rail } from './rail.js';
+import { useForgetWithdrawn } from './use-forget-withdrawn.js';
 
 /** Asks a visitor to sign in first; brings everybody else to their screen, inside the rail. */
 export function SignedInLayout() {
@@ -19,6 +20,7 @@ export function SignedInLayout() {
   const location = useLocation();
   const matches = useMatches();
   const { t } = useTranslation('common');
+  useForgetWithdrawn();
   if (person === null) {
     // From the account page people sign out: nothing calls them back there.
     const next = location.pathname === PATTERNS.account ? undefined : location.pathname + location.search;

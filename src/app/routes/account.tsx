@@ -1,6 +1,7 @@
 import { LetterChoiceBoard } from '#src/features/letters/components/letter-choice-board.js';
 import { AccountPage } from '#src/features/session/components/account-page.js';
+import { HiddenBoard } from '#src/features/withdrawals/components/hidden-board.js';
 
 export function Component() {
-  return <AccountPage letters={<LetterChoiceBoard />} />;
+  return <AccountPage letters={<LetterChoiceBoard />} hidden={<HiddenBoard />} />;
 }

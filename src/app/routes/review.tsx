@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
 import { ReviewPage } from '#src/features/reviews/components/review-page.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
+import { TakeBackLink } from '#src/lib/take-back-link.js';
 
 /** The review, where an elder may speak instead of writing. */
 export function Component() {
@@ -14,10 +15,15 @@ function EntryVoices({ entryId }: { entryId: string }) {
   const { data: calendar } = useQuery(calendarQuery(calendarId));
   if (calendar === undefined) return null;
   return (
-    <AttachmentsPanel
-      look="plain"
-      communityId={calendar.communityId}
-      subject={{ subjectType: 'entry', subjectId: entryId }}
-    />
+    <>
+      <AttachmentsPanel
+        look="plain"
+        communityId={calendar.communityId}
+        subject={{ subjectType: 'entry', subjectId: entryId }}
+      />
+      <div>
+        <TakeBackLink communityId={calendar.communityId} itemType="entry" itemId={entryId} />
+      </div>
+    </>
   );
 }

@@ -116,3 +116,12 @@ export async function dropRecording(clientId: string): Promise<void> {
 function everythingOf(clientId: string): IDBKeyRange {
   return IDBKeyRange.bound([clientId, 0, 0], [clientId, Infinity, Infinity]);
 }
+
+/** What belongs to things that were taken back, whoever recorded it on this device. */
+export async function dropRecordingsOf(goneIds: ReadonlySet<string>): Promise<void> {
+  const all = await (await database()).getAll('recording');
+  const gone = all.filter(
+    ({ clientId, subjectId }) => goneIds.has(clientId) || [...goneIds].some((id) => subjectId.includes(id)),
+  );
+  for (const { clientId } of gone) await dropRecording(clientId);
+}

@@ -17,8 +17,14 @@ import { useSignOut } from '../api/session-mutations.js';
 import { ChangePasswordForm } from './change-password-form.js';
 import { DevicesBoard } from './devices-board.js';
 
+interface AccountPageProps {
+  letters?: ReactNode;
+  /** What the person may bring back. */
+  hidden?: ReactNode;
+}
+
 /** The person and their device: village on screen, look, password, sign out. */
-export function AccountPage({ letters }: { letters?: ReactNode }) {
+export function AccountPage({ letters, hidden }: AccountPageProps) {
   const { t } = useTranslation(['session', 'common']);
   const { person } = useSession();
   const words = useProblemWords();
@@ -30,6 +36,7 @@ export function AccountPage({ letters }: { letters?: ReactNode }) {
       <Columns>
         <div className="grid gap-4">
           <VillageBoard />
+          {hidden}
           {letters}
           <Board title={t('account.screen')}>
             <ThemePick />

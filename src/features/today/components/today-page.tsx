@@ -22,7 +22,7 @@ import { WaitingBoard } from './waiting-board.js';
 import { WatchCard } from './watch-card.js';
 
 /** What waits for the person, the peg, and what to look for. Who comes in for one task is led on to it. */
-export function TodayPage({ asked }: { asked: ReactNode }) {
+export function TodayPage({ asked, urgent }: { asked: ReactNode; urgent?: ReactNode }) {
   const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
   const { place, isLoading } = useCurrentPlace();
@@ -50,6 +50,7 @@ export function TodayPage({ asked }: { asked: ReactNode }) {
       {today.error !== null && !data && (
         <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
       )}
+      {urgent}
       {data && <TodayBoards data={data} asked={asked} />}
     </Page>
   );

@@ -1,9 +1,11 @@
 import { useTranslation } from 'react-i18next';
 import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import { useCurrentCommunity } from '#src/lib/community.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
+import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { More } from '#src/ui/fold.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { WindowBar } from '#src/ui/pictures/window-bar.js';
@@ -81,9 +83,16 @@ const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
 
 function EntryRest({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
   const { t } = useTranslation('versions');
+  const { communityId } = useCurrentCommunity();
   const facts = useEntryFacts().groups(entry.content, entry.dates, year, markers);
   return (
     <More label={t('page.moreOfIt')}>
+      <TakeBackLink
+        communityId={communityId}
+        itemType="entry"
+        itemId={entry.entryId}
+        about={entry.content.titleOfficer}
+      />
       <dl>
         {GROUPS.flatMap((group) => facts[group]).map(({ key, label, value }) => (
           <div key={key} className="fact">

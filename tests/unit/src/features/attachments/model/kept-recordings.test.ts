@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import {
   dropPart,
   dropRecording,
+  dropRecordingsOf,
   keepRecording,
   keepSlice,
   keptParts,
@@ -79,5 +80,21 @@ describe('a recording on this device', () => {
     expect(await keptParts(one)).toEqual([]);
     expect((await keptRecordings('c', one)).map(({ clientId }) => clientId)).toEqual([other.clientId]);
     expect(await keptParts(other)).toHaveLength(2);
+  });
+
+  it('forgets what belongs to things that were taken back, whoever recorded it here', async () => {
+    const [one, other, elsewhere] = [
+      keptRecording({ personId: 'd', subjectId: 'gone' }),
+      keptRecording({ personId: 'e', subjectId: 'gone' }),
+      keptRecording({ personId: 'd', subjectId: 'stays' }),
+    ];
+    for (const recording of [one, other, elsewhere]) {
+      await keepRecording(recording);
+      await keepSlice(recording.clientId, slice(1, 0, 'a voice'));
+    }
+    await dropRecordingsOf(new Set(['gone']));
+    expect([await keptRecordings('d', one), await keptRecordings('e', other)]).toEqual([[], []]);
+    expect([await keptParts(one), await keptParts(other)]).toEqual([[], []]);
+    expect(await keptParts(elsewhere)).toHaveLength(1);
   });
 });
