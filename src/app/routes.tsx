@@ -54,7 +54,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
   {
     path: PATTERNS.figure,
-    texts: ['figures', 'stars', 'sky', 'attachments', 'sharing'],
+    texts: ['figures', 'stars', 'sky', 'attachments', 'sharing', 'consents'],
     load: () => import('./routes/figure.js'),
   },
   { path: PATTERNS.changeFigure, texts: ['figures'], load: () => import('./routes/figure-change.js') },
@@ -69,10 +69,20 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['people', 'letters'],
     load: () => import('./routes/village-asking.js'),
   },
+  {
+    path: PATTERNS.villageConsents,
+    texts: ['people', 'consents', 'sharing'],
+    load: () => import('./routes/village-consents.js'),
+  },
+  {
+    path: PATTERNS.itemConsents,
+    texts: ['consents', 'sharing', 'attachments'],
+    load: () => import('./routes/item-consents.js'),
+  },
   { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'sky', 'attachments', 'sharing'],
+    texts: ['calendars', 'versions', 'sky', 'attachments', 'sharing', 'consents'],
     load: () => import('./routes/calendar.js'),
   },
   {
@@ -93,7 +103,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,
-    texts: ['reviews', 'sky', 'attachments', 'sharing'],
+    texts: ['reviews', 'sky', 'attachments', 'sharing', 'consents'],
     load: () => import('./routes/review.js'),
     rail: false,
   },

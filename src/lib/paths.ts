@@ -27,6 +27,8 @@ export const PATTERNS = {
   villageRecords: '/village/records',
   villageAsking: '/village/asking',
   villageGroups: '/village/groups',
+  villageConsents: '/village/consents',
+  itemConsents: '/village/consents/:itemType/:itemId',
   calendars: '/calendars',
   calendar: '/calendars/:calendarId',
   versions: '/calendars/:calendarId/versions',
@@ -99,6 +101,10 @@ export const paths = {
   villageRecords: () => PATTERNS.villageRecords,
   villageAsking: () => PATTERNS.villageAsking,
   villageGroups: () => PATTERNS.villageGroups,
+  villageConsents: () => PATTERNS.villageConsents,
+  /** What was agreed about one thing. */
+  itemConsents: (itemType: string, itemId: string) =>
+    `/village/consents/${encodeURIComponent(itemType)}/${encodeURIComponent(itemId)}`,
   /** With a marker, the person chooses a calendar and a new entry then goes by it. */
   calendars: (query: MarkerQuery = {}) => withQuery(PATTERNS.calendars, { ...query }),
   calendar: (calendarId: string, query: { entry?: string } & MarkerQuery = {}) =>

@@ -2,25 +2,15 @@
 export const texts = {
   title: 'What was agreed',
   lead: 'Who was asked about what, and what they said yes to. What is not ticked is a no, and no answer is a no.',
-  tab: 'Consents',
   empty: 'Nobody has been asked yet',
   emptyHint: 'Open an entry or a figure and choose “What was agreed” to ask its giver.',
   noneOfMine: 'Nothing here is about you',
   noneOfMineHint: 'What you are asked about stands here, and you can take any of it back.',
   forSteward: 'You keep the register. What a kept thing says is for its own people.',
   dueTitle: 'To be asked again',
-  dueCount_one: '{{count}} consent is due to be asked again',
-  dueCount_other: '{{count}} consents are due to be asked again',
   restTitle: 'All others',
-  list: 'Consents',
-  kept: 'Something that is kept',
-  column: {
-    thing: 'About',
-    giver: 'Who',
-    state: 'Answer',
-    uses: 'Yes to',
-    review: 'Ask again by',
-  },
+  keptLine: '{{item}} that its people keep',
+  line: { until: 'Holds until {{day}}.', reviewBy: 'Ask again by {{day}}.' },
   item: {
     entry: 'Entry',
     figure: 'Figure',
@@ -37,9 +27,6 @@ export const texts = {
     lapsed: 'Has run out',
     due: 'Ask again',
   },
-  usesYes_one: '{{count}} use',
-  usesYes_other: '{{count}} uses',
-  usesNone: 'nothing',
   open: 'What was agreed',
   openHint: 'Who was asked about this, and what they said yes to.',
 
@@ -63,12 +50,11 @@ export const texts = {
     withdrawn: 'Taken back. It is hidden from now on.',
     saved: 'Written down.',
     stop: 'Do not change anything',
+    proofs: 'Voices and pictures that prove it',
     yesTo: 'Yes to',
     noTo: 'No to',
     recorded: 'Written down by {{name}}, {{day}}',
-    saidMyself: 'said it here, signed in',
     hidden: 'This thing is hidden: a yes to keep and to show it is missing or has run out.',
-    back: 'To the register',
   },
 
   fact: {
@@ -92,7 +78,6 @@ export const texts = {
   },
 
   form: {
-    title: 'What was said',
     who: 'Who is asked',
     person: 'One person',
     group: 'A group',
@@ -110,6 +95,8 @@ export const texts = {
     explanationHint: 'Such as the number on the printed card.',
     answer: 'What they said',
     uses: 'What they said yes to',
+    lastTime: 'Last time they said yes to: {{uses}}. Ask for each anew.',
+    rules: 'What goes with it',
     usesHint: 'Ask for each by itself. What is not ticked is a no.',
     naming: 'How they are named',
     namingHint: 'Nothing chosen means: not named.',
@@ -126,12 +113,13 @@ export const texts = {
     mayWithdraw: 'Who else may take it back',
     mayWithdrawHint: 'The giver always may.',
     proof: 'Proof',
-    proofNone: 'None yet',
     proofHint: 'A yes needs one: their voice, a mark, a signature, or somebody who was there.',
-    proofVoiceHint: 'Write the asking down first; then record the voice here and choose it as the proof.',
     witness: 'Who was there',
     proofFile: 'Which recording or picture',
     proofFileNone: 'The paper is kept by the village',
+    proofVoiceNone: 'Choose the recording',
+    proofFileHint:
+      'Nothing is added yet. Write the asking down first; then add a recording or a picture to it under “Voices and pictures that prove it”.',
     save: 'Write it down',
     newer:
       'Somebody wrote down something newer: {{state}}. What you typed is still here; save again to put yours in its place.',
@@ -163,41 +151,61 @@ export const texts = {
   withdrawer: { family: 'their family', group: 'their group', elders: 'the elders' },
   use: {
     keep: {
+      short: 'keep',
       name: 'Keep it',
       why: 'Dawnpeg keeps it for the village. Without this it is hidden from everybody else.',
     },
-    show: { name: 'Show it', why: 'People see it here at the level that it has, and nobody beyond that.' },
-    print: { name: 'Print it', why: 'It stands on the village’s peg board and on cards that hang on walls.' },
+    show: {
+      short: 'show',
+      name: 'Show it',
+      why: 'People see it here at the level that it has, and nobody beyond that.',
+    },
+    print: {
+      short: 'print',
+      name: 'Print it',
+      why: 'It stands on the village’s peg board and on cards that hang on walls.',
+    },
     recording: {
+      short: 'open the voice or picture',
       name: 'Let the voice or the picture be opened',
       why: 'Without this, only what was written down from it is shared, never the voice or picture itself.',
     },
     feed: {
+      short: 'calendars on telephones',
       name: 'Put it into calendars on telephones',
       why: 'Those who subscribe get its days by themselves.',
     },
     message: {
+      short: 'messages',
       name: 'Send it by text or voice message',
       why: 'A short message tells people when the time has come.',
     },
-    radio: { name: 'Say it on the radio', why: 'Anybody in reach can hear it, also outside the village.' },
-    training: { name: 'Teach staff with it', why: 'The service shows it to its own people when they learn.' },
-    research: { name: 'Use it in research', why: 'Researchers may read it and write about it.' },
+    radio: {
+      short: 'radio',
+      name: 'Say it on the radio',
+      why: 'Anybody in reach can hear it, also outside the village.',
+    },
+    training: {
+      short: 'teach staff',
+      name: 'Teach staff with it',
+      why: 'The service shows it to its own people when they learn.',
+    },
+    research: {
+      short: 'research',
+      name: 'Use it in research',
+      why: 'Researchers may read it and write about it.',
+    },
     translation: {
+      short: 'translate',
       name: 'Translate it',
       why: 'Somebody puts it into another language; words can change on the way.',
     },
     machine: {
+      short: 'computers',
       name: 'Let computers learn from it or speak it',
       why: 'Machine learning and computer voices. What a machine has learned cannot be taken back.',
     },
-    commercial: { name: 'Sell it, or sell with it', why: 'Somebody earns money with it.' },
-  },
-
-  due: {
-    title_one: '{{count}} consent is due to be asked again',
-    title_other: '{{count}} consents are due to be asked again',
-    detail: 'Ask anew; silence is never a yes.',
+    commercial: { short: 'sale', name: 'Sell it, or sell with it', why: 'Somebody earns money with it.' },
   },
 
   card: {

@@ -7,6 +7,7 @@ export const texts = {
     figures: 'Figures',
     groups: 'Groups',
     asking: 'To ask',
+    consents: 'Consents',
     settings: 'Settings',
     records: 'Records',
   },

@@ -93,6 +93,11 @@ export const texts = {
       title: '{{label}} of {{place}} can be printed',
       detail: 'Measure one page first, then print the rest.',
     },
+    'consents-due': {
+      title_one: '{{count}} consent is due to be asked again',
+      title_other: '{{count}} consents are due to be asked again',
+      detail: 'Ask anew; no answer is never a yes.',
+    },
   },
   action: {
     review: 'Go on with the review',

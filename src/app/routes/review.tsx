@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
 import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
+import { ConsentLink } from '#src/features/consents/components/consent-link.js';
 import { ReviewPage } from '#src/features/reviews/components/review-page.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
 import { TakeBackLink } from '#src/lib/take-back-link.js';
@@ -16,6 +17,7 @@ function EntryVoices({ entryId }: { entryId: string }) {
   if (calendar === undefined) return null;
   return (
     <>
+      <ConsentLink itemType="entry" itemId={entryId} />
       <AttachmentsPanel
         look="plain"
         communityId={calendar.communityId}

@@ -17,6 +17,7 @@ export function VillageTabs() {
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
         { to: paths.villageGroups(), label: t('tabs.groups') },
         ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),
+        { to: paths.villageConsents(), label: t('tabs.consents') },
         { to: paths.villageSettings(), label: t('tabs.settings') },
         ...(inner ? [{ to: paths.villageRecords(), label: t('tabs.records') }] : []),
       ]}

@@ -67,7 +67,7 @@ function TodayBoards({ data, asked }: { data: Today; asked: ReactNode }) {
   const { is } = useRoles();
   const { place } = useCurrentPlace();
   const first = data.coming[0];
-  const waiting = <WaitingBoard items={data.waiting} />;
+  const waiting = <WaitingBoard items={data.waiting} consentsDue={data.consentsDue} />;
   const watch = first ? (
     <WatchCard coming={first} place={place} later={data.comingIsLater} />
   ) : data.placeId === null ? (

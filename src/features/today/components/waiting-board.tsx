@@ -1,7 +1,8 @@
-import { CircleDot } from 'lucide-react';
+import { CircleDot, RotateCw } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { WaitingItem } from '#shared/contracts/today.js';
+import { paths } from '#src/lib/paths.js';
 import { StateIcon } from '#src/ui/icons/state-icon.js';
 import { CountPegs } from '#src/ui/pegs.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -21,23 +22,40 @@ const ICONS: Record<WaitingItem['kind'], ReactNode> = {
 };
 
 /** What waits for this person: who and what in each line. */
-export function WaitingBoard({ items }: { items: readonly WaitingItem[] }) {
+export function WaitingBoard({
+  items,
+  consentsDue,
+}: {
+  items: readonly WaitingItem[];
+  /** Consents to be asked for again, without what they are about. */
+  consentsDue: number;
+}) {
   const { t } = useTranslation('today');
   const wordsOf = useWaitingWords();
-  if (items.length === 0) return null;
+  if (items.length === 0 && consentsDue === 0) return null;
+  const askAgain = {
+    key: 'consents-due',
+    icon: <RotateCw aria-hidden size={24} />,
+    title: t('waiting.consents-due.title', { count: consentsDue }),
+    detail: t('waiting.consents-due.detail'),
+    to: paths.villageConsents(),
+  };
   return (
     <Board title={t('waiting.title')}>
       <TaskList
-        tasks={items.map((item) => ({
-          key: `${item.kind} ${item.calendarId} ${item.entryId ?? ''} ${item.personName ?? ''}`,
-          icon: ICONS[item.kind],
-          ...wordsOf(item),
-          ...(item.of > 0 &&
-          item.of <= 24 &&
-          (item.kind === 'answer-entries' || item.kind === 'review-progress')
-            ? { extra: <CountPegs done={item.done} total={item.of} /> }
-            : {}),
-        }))}
+        tasks={[
+          ...items.map((item) => ({
+            key: `${item.kind} ${item.calendarId} ${item.entryId ?? ''} ${item.personName ?? ''}`,
+            icon: ICONS[item.kind],
+            ...wordsOf(item),
+            ...(item.of > 0 &&
+            item.of <= 24 &&
+            (item.kind === 'answer-entries' || item.kind === 'review-progress')
+              ? { extra: <CountPegs done={item.done} total={item.of} /> }
+              : {}),
+          })),
+          ...(consentsDue > 0 ? [askAgain] : []),
+        ]}
       />
     </Board>
   );
