@@ -76,6 +76,10 @@ import { ComingMarkersService } from './features/today/coming-markers.service.js
 import { todayRoutes } from './features/today/today.routes.js';
 import { TodayService } from './features/today/today.service.js';
 import { WaitingService } from './features/today/waiting.service.js';
+import { CardPrintService } from './features/cards/card-print.service.js';
+import { CardSignInService } from './features/cards/card-sign-in.service.js';
+import { cardsRoutes } from './features/cards/cards.routes.js';
+import { CardsService } from './features/cards/cards.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
 import { PublishingService } from './features/versions/publishing.service.js';
@@ -159,7 +163,8 @@ export function createApp(options: AppOptions): App {
   app.use(compression());
 
   const sessionService = new SessionService(dataSource, clock);
-  const passport = createPassport(sessionService);
+  const cardSignIn = new CardSignInService(dataSource, clock);
+  const passport = createPassport(sessionService, cardSignIn);
   const router = express.Router();
   router.use('/api', express.json({ limit: BODY_LIMIT, strict: false }));
   router.use('/api', sessions(options), passport.initialize() as never, passport.session() as never);
@@ -167,7 +172,16 @@ export function createApp(options: AppOptions): App {
 
   const mount = new Mount(router, dataSource, path.join(config.dataDir, WAITING_FILES));
   healthRoutes(mount, new HealthService(dataSource), productVersion);
-  sessionRoutes(router, mount, sessionService, new DevicesService(dataSource, clock), passport, clock);
+  sessionRoutes(router, mount, {
+    service: sessionService,
+    cards: cardSignIn,
+    devices: new DevicesService(dataSource, clock),
+    passport,
+    clock,
+    cardMinutes: config.cardSessionMinutes,
+  });
+  const cards = new CardsService(dataSource, clock);
+  cardsRoutes(mount, cards, new CardPrintService(cards, clock, config.publicUrl));
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));
 
   const places = new PlacesService(dataSource, clock);

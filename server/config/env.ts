@@ -21,6 +21,8 @@ export interface Config {
   /** How many reverse proxies stand in front (Express `trust proxy`); 0 trusts none. */
   readonly trustProxy: number;
   readonly sessionSecret: string;
+  /** A session that a card opened ends after so many minutes without use: the phone may be a shared one. */
+  readonly cardSessionMinutes: number;
   readonly logLevel: LogLevel;
   /** True where the demo villages and their accounts are to be made. Never true in production. */
   readonly demo: boolean;
@@ -105,6 +107,12 @@ const variables = z.object({
   SESSION_SECRET: z
     .string('is missing: start with `npm start`, which makes one, or set 32 or more random characters')
     .min(SESSION_SECRET_MIN_LENGTH, 'is too short: set 32 or more random characters'),
+  CARD_SESSION_MINUTES: z
+    .string()
+    .regex(/^\d{1,4}$/, 'must be a number of minutes between 5 and 1440')
+    .transform(Number)
+    .refine((value) => value >= 5 && value <= 1440, 'must be a number of minutes between 5 and 1440')
+    .default(30),
   SMTP_URL: z
     .url({
       protocol: /^smtps?$/,
@@ -165,6 +173,7 @@ export function parseConfig(values: Readonly<Record<string, string | undefined>>
     secureCookies,
     trustProxy: env.TRUST_PROXY,
     sessionSecret: env.SESSION_SECRET,
+    cardSessionMinutes: env.CARD_SESSION_MINUTES,
     logLevel: env.LOG_LEVEL,
     demo,
     mail: Object.freeze({

@@ -19,7 +19,8 @@ export async function admit(
   person: Person,
   params: Readonly<Record<string, string>>,
 ): Promise<Actor> {
-  const communityId = await communityOf(dataSource, access.scope, params);
+  const found = await communityOf(dataSource, access.scope, params);
+  const communityId = person.byCardIn === undefined || person.byCardIn === found ? found : null;
   const membership =
     communityId === null
       ? null

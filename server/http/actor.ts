@@ -5,6 +5,8 @@ export interface Person {
   id: string;
   email: string;
   displayName: string;
+  /** Set where a card signed them in: it opens this one village, and nothing that asks for a password. */
+  byCardIn?: string;
 }
 
 /** Who asks, within the community that the path belongs to. */
@@ -12,6 +14,11 @@ export interface Actor {
   person: Person;
   communityId: string;
   roles: readonly Role[];
+}
+
+/** Whose memberships count in this session. */
+export function membershipsHere({ id, byCardIn }: Person): { personId: string; communityId?: string } {
+  return byCardIn === undefined ? { personId: id } : { personId: id, communityId: byCardIn };
 }
 
 export function hasRole(actor: Pick<Actor, 'roles'>, ...roles: Role[]): boolean {

@@ -44,6 +44,13 @@ function limit(
 }
 
 function accountOf(request: Request): string {
-  const { email } = (request.body ?? {}) as { email?: unknown };
-  return typeof email === 'string' ? email.trim().toLowerCase().slice(0, 190) : '';
+  const { email, code } = (request.body ?? {}) as { email?: unknown; code?: unknown };
+  if (typeof email === 'string') return email.trim().toLowerCase().slice(0, 190);
+  // A card goes by its code alone.
+  return typeof code === 'string'
+    ? code
+        .toUpperCase()
+        .replace(/[^A-Z0-9]/gu, '')
+        .slice(0, 190)
+    : '';
 }

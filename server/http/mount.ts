@@ -50,7 +50,7 @@ export class Mount {
   forPerson<E extends Endpoint>(endpoint: E, handler: Handler<E, Person>): void {
     this.expect(endpoint, 'signed-in');
     this.add(endpoint, async (request, call) => {
-      const person = signedIn(request);
+      const person = signedIn(endpoint, request);
       return handler(call(), person);
     });
   }
@@ -59,7 +59,7 @@ export class Mount {
     const { access } = endpoint;
     if (access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
     this.add(endpoint, async (request, call) => {
-      const person = signedIn(request);
+      const person = signedIn(endpoint, request);
       const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
       return handler(call(), actor);
     });
@@ -70,7 +70,7 @@ export class Mount {
     const { access, upload } = endpoint;
     if (access.kind !== 'member' || upload === null) throw new TypeError(`${endpoint.id} takes no file`);
     this.add(endpoint, async (request, _call, response) => {
-      const person = signedIn(request);
+      const person = signedIn(endpoint, request);
       const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
       return withUpload({ request, response, folder: this.waitingFolder, upload }, ({ meta, file }) =>
         handler(parseInput(endpoint, request, meta), actor, file),
@@ -100,9 +100,12 @@ function personOf(request: Request): Person | null {
   return request.user ?? null;
 }
 
-function signedIn(request: Request): Person {
+function signedIn({ needsPassword }: Endpoint, request: Request): Person {
   const person = personOf(request);
   if (person === null) throw new AppError('not-signed-in');
+  if (needsPassword && person.byCardIn !== undefined) {
+    throw new AppError('not-allowed', { reason: 'needs-password' });
+  }
   return person;
 }
 

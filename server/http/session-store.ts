@@ -32,6 +32,7 @@ export class SessionStore extends Store {
     const row = {
       sidHash: sessionHash(sid),
       personId: personIdOf(session),
+      cardId: session.card?.id ?? null,
       data: JSON.stringify(session),
       expiresAt: new Date(this.clock.now().getTime() + lifetimeMs),
     };

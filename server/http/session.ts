@@ -8,7 +8,14 @@ declare module 'express-session' {
   interface SessionData {
     /** Said once, at the sign-in: when it was and what the browser called itself. */
     device?: SessionDevice;
+    /** The card that opened it, and the one village that it opens. */
+    card?: SessionCard;
   }
+}
+
+export interface SessionCard {
+  id: string;
+  communityId: string;
 }
 
 const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;

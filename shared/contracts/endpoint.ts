@@ -43,6 +43,8 @@ export interface Endpoint<
   fileType: string | null;
   /** Null where no file comes with the call. */
   upload: Upload | null;
+  /** True where a session that a card opened is too weak. */
+  needsPassword: boolean;
 }
 
 interface EndpointSpec<
@@ -63,6 +65,7 @@ interface EndpointSpec<
   status?: number;
   fileType?: string;
   upload?: Upload;
+  needsPassword?: boolean;
 }
 
 /** Fills the defaults: status 200 with an answer, 204 without one. */
@@ -86,6 +89,7 @@ export function defineEndpoint<
     status: spec.status ?? (spec.response === undefined && fileType === null ? 204 : 200),
     fileType,
     upload: spec.upload ?? null,
+    needsPassword: spec.needsPassword ?? false,
   };
 }
 

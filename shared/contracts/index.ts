@@ -4,6 +4,7 @@ import { attachmentsEndpoints } from './attachments.js';
 import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
 import { consentsEndpoints } from './consents.js';
+import { cardsEndpoints } from './cards.js';
 import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { figuresEndpoints } from './figures.js';
@@ -28,6 +29,7 @@ import { versionsEndpoints } from './versions.js';
 export const ENDPOINTS: readonly Endpoint[] = [
   healthEndpoints,
   sessionEndpoints,
+  cardsEndpoints,
   lettersEndpoints,
   peopleEndpoints,
   placesEndpoints,

@@ -76,6 +76,7 @@ export const lettersEndpoints = {
     path: '/api/letters/choice',
     summary: 'Choose e-mail or none, quiet hours, and whether to be visited',
     access: signedIn,
+    needsPassword: true,
     body: letterChoiceInput,
     response: letterChoice,
   }),

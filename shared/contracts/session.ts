@@ -10,6 +10,8 @@ export type SessionPerson = z.infer<typeof sessionPerson>;
 export const sessionState = z.strictObject({
   person: sessionPerson.nullable(),
   memberships: z.array(membership).nullable(),
+  /** Set where a card opened the session: it ends by itself after so long without use. */
+  card: z.strictObject({ leaveAfterMinutes: z.number().int() }).nullable(),
   csrfToken: z.string(),
 });
 export type SessionState = z.infer<typeof sessionState>;
@@ -94,6 +96,7 @@ export const sessionEndpoints = {
     path: '/api/session/password',
     summary: 'Change the own password; other devices are signed out',
     access: signedIn,
+    needsPassword: true,
     body: changePasswordInput,
     response: sessionState,
   }),
@@ -130,6 +133,7 @@ export const sessionEndpoints = {
     path: '/api/session/devices',
     summary: 'Where the person is signed in, last used first',
     access: signedIn,
+    needsPassword: true,
     response: listOf(device),
   }),
   endDevice: defineEndpoint({
@@ -138,6 +142,7 @@ export const sessionEndpoints = {
     path: '/api/session/devices/:deviceId',
     summary: 'Sign out on one of the own devices; one that is signed out already stays so',
     access: signedIn,
+    needsPassword: true,
     params: z.strictObject({ deviceId: device.shape.id }),
   }),
   endOtherDevices: defineEndpoint({
@@ -146,5 +151,6 @@ export const sessionEndpoints = {
     path: '/api/session/devices',
     summary: 'Sign out everywhere but here',
     access: signedIn,
+    needsPassword: true,
   }),
 } as const;

@@ -2,6 +2,7 @@ import { texts as air } from './en/air.js';
 import { texts as attachments } from './en/attachments.js';
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
+import { texts as cards } from './en/cards.js';
 import { texts as common } from './en/common.js';
 import { texts as consents } from './en/consents.js';
 import { texts as drift } from './en/drift.js';
@@ -31,6 +32,7 @@ import { texts as withdrawals } from './en/withdrawals.js';
  */
 export const en = {
   common,
+  cards,
   session,
   files,
   letters,

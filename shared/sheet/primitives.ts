@@ -54,7 +54,7 @@ export interface LinePrimitive {
 }
 
 export type RectRole =
-  'best' | 'margin' | 'watch' | 'last-advised' | 'tag' | 'flap' | 'tile-map' | 'clearing' | 'rod';
+  'best' | 'margin' | 'watch' | 'last-advised' | 'tag' | 'flap' | 'tile-map' | 'clearing' | 'rod' | 'code';
 
 /** `hatch` is drawn as an outline filled by slanted lines. */
 export interface RectPrimitive extends Box {

@@ -193,6 +193,10 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
   const bodies: Record<string, () => object> = {
     signIn: () => ({ email: 'observer@dawnpeg.example', password: DEMO_PASSWORD }),
     changePassword: () => ({ currentPassword: 'not mine', newPassword: 'never comes to be' }),
+    openCard: () => ({ code: 'AAABBBCCCDDDEEEFFF' }),
+    chooseCardPin: () => ({ code: 'AAABBBCCCDDDEEEFFF', pin: '4711' }),
+    signInByCard: () => ({ code: 'AAABBBCCCDDDEEEFFF', pin: '4711' }),
+    printCard: () => ({ code: 'AAABBBCCCDDDEEEFFF', name: '', size: 'a7' }),
     redeemCode: () => ({ email: 'a@example.org', code: 'ABCD-EFGH-JKMN', newPassword: 'never comes to be' }),
     resetPassword: () => ({
       token: `${village.personId}.${'0'.repeat(64)}`,

@@ -11,7 +11,7 @@ import { CurrentCommunityProvider } from '#src/lib/community.js';
 import { sessionQuery } from '#src/lib/session.js';
 import { ToastProvider } from '#src/ui/toast.js';
 
-export const VISITOR: SessionState = { person: null, memberships: null, csrfToken: 'test' };
+export const VISITOR: SessionState = { person: null, memberships: null, card: null, csrfToken: 'test' };
 
 export const OFFICER: SessionState = {
   person: {
@@ -26,6 +26,7 @@ export const OFFICER: SessionState = {
       roles: ['officer'],
     },
   ],
+  card: null,
   csrfToken: 'test',
 };
 

@@ -20,6 +20,7 @@ import { OneTimeCodeEntity } from './one-time-code.entity.js';
 import { PersonEntity } from './person.entity.js';
 import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
+import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
 import { EntryVariantEntity } from './entry-variant.entity.js';
@@ -32,6 +33,7 @@ export const ENTITIES = [
   PersonEntity,
   SessionEntity,
   OneTimeCodeEntity,
+  SignInCardEntity,
   CommunityEntity,
   MembershipEntity,
   PlaceEntity,

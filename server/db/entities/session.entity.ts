@@ -18,6 +18,11 @@ export class SessionEntity {
   @Column({ name: 'person_id', type: 'uuid', nullable: true })
   personId!: string | null;
 
+  /** The card that opened it, if it was one. */
+  @Index('session_card')
+  @Column({ name: 'card_id', type: 'uuid', nullable: true })
+  cardId!: string | null;
+
   @Column({ type: 'longtext' })
   data!: string;
 

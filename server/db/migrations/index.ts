@@ -7,6 +7,7 @@ import { Attachments1797200000000 } from './1797200000000-attachments.js';
 import { AttachmentSharing1797300000000 } from './1797300000000-attachment-sharing.js';
 import { Consents1797400000000 } from './1797400000000-consents.js';
 import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
+import { Cards1797900000000 } from './1797900000000-cards.js';
 import { Variants1798000000000 } from './1798000000000-variants.js';
 
 /** In the order in which they run. */
@@ -20,5 +21,6 @@ export const MIGRATIONS = [
   AttachmentSharing1797300000000,
   Consents1797400000000,
   Withdrawals1797800000000,
+  Cards1797900000000,
   Variants1798000000000,
 ];

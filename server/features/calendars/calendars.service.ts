@@ -6,7 +6,7 @@ import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { isDuplicate } from '../../db/duplicate.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import { seesDrafts, type Actor, type Person } from '../../http/actor.js';
+import { membershipsHere, seesDrafts, type Actor, type Person } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { entrySight, type SeenThing } from '../../policy/entry-sight.js';
@@ -23,12 +23,11 @@ export class CalendarsService {
 
   /** Calendars of the person's communities, newest year first, then by place. */
   async listOf(person: Person, communityId: string | null): Promise<Calendar[]> {
-    const memberships = await this.dataSource
-      .getRepository(MembershipEntity)
-      .findBy(communityId === null ? { personId: person.id } : { personId: person.id, communityId });
-    if (communityId !== null && memberships.length === 0) throw notFound();
+    const memberships = await this.dataSource.getRepository(MembershipEntity).findBy(membershipsHere(person));
+    const wanted = memberships.filter((row) => communityId === null || row.communityId === communityId);
+    if (communityId !== null && wanted.length === 0) throw notFound();
     const actors = new Map<string, Actor>(
-      memberships.map((row) => [row.communityId, { person, communityId: row.communityId, roles: row.roles }]),
+      wanted.map((row) => [row.communityId, { person, communityId: row.communityId, roles: row.roles }]),
     );
     const rows = await this.dataSource.getRepository(CalendarEntity).find({
       where: { communityId: In([...actors.keys()]) },

@@ -3,7 +3,7 @@ import type { DataSource } from 'typeorm';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import type { Actor, Person } from '../../http/actor.js';
+import { membershipsHere, type Actor, type Person } from '../../http/actor.js';
 import { conflict, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
@@ -17,7 +17,7 @@ export class CommunitiesService {
 
   async listOf(person: Person): Promise<Community[]> {
     const memberships = await this.dataSource.getRepository(MembershipEntity).find({
-      where: { personId: person.id },
+      where: membershipsHere(person),
       relations: { community: true },
       order: { community: { name: 'ASC' } },
     });

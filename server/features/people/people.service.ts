@@ -17,6 +17,7 @@ import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { endCardOf, mayHaveCard } from '../cards/card-ends.service.js';
 import { CODE_LIFETIME_DAYS, codeHash, newCode } from '../session/one-time-codes.service.js';
 import { toCommunityPerson } from './people.mapper.js';
 
@@ -88,6 +89,7 @@ export class PeopleService {
       const where = { id: membership.id, version: input.version };
       const { affected } = await manager.update(MembershipEntity, where, { roles: input.roles });
       if (affected === 0) throw stale(await this.read(manager, actor, personId), input);
+      if (!mayHaveCard(input.roles)) await this.endCard(manager, actor, personId, 'roles');
       await this.record(manager, actor, 'roles-changed', personId, {
         before: membership.roles,
         after: input.roles,
@@ -113,6 +115,7 @@ export class PeopleService {
       await this.expectAnotherSteward(manager, membership);
       if ([...signOffRule.mustSign, ...signOffRule.oneOf].includes(personId)) throw conflict('named-in-rule');
       await manager.delete(MembershipEntity, { id: membership.id });
+      await this.endCard(manager, actor, personId, 'left');
       await this.record(manager, actor, 'membership-ended', personId, { roles: membership.roles });
     });
   }
@@ -173,6 +176,15 @@ export class PeopleService {
       },
     });
     return new Map(codes.map((code) => [code.personId ?? '', code]));
+  }
+
+  private async endCard(
+    manager: EntityManager,
+    { communityId, person }: Actor,
+    personId: string,
+    why: 'roles' | 'left',
+  ): Promise<void> {
+    await endCardOf(manager, { communityId, personId }, { at: this.clock.now(), actorId: person.id, why });
   }
 
   private async record(

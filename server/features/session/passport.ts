@@ -1,6 +1,8 @@
+import type { Request } from 'express';
 import { Passport, type Authenticator } from 'passport';
 import { Strategy } from 'passport-local';
 import type { Person } from '../../http/actor.js';
+import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import type { SessionService } from './session.service.js';
 
 declare global {
@@ -11,12 +13,13 @@ declare global {
       id: string;
       email: string;
       displayName: string;
+      byCardIn?: string;
     }
   }
 }
 
 /** One authenticator an application: the package's global one would leak between tests. */
-export function createPassport(service: SessionService): Authenticator {
+export function createPassport(service: SessionService, cards: CardSignInService): Authenticator {
   const passport = new Passport() as Authenticator;
   passport.use(
     new Strategy({ usernameField: 'email', passwordField: 'password' }, (email, password, done) => {
@@ -33,16 +36,24 @@ export function createPassport(service: SessionService): Authenticator {
   passport.serializeUser((user, done) => {
     done(null, user.id);
   });
-  passport.deserializeUser((id: string, done) => {
-    service.findPerson(id).then(
-      (person) => {
-        done(null, person && slim(person));
-      },
-      (error: unknown) => {
-        done(error);
-      },
-    );
-  });
+  passport.deserializeUser(
+    (request: Request, id: string, done: (error: unknown, person?: Person | null) => void) => {
+      const { card } = request.session;
+      const read = async (): Promise<Person | null> => {
+        if (card !== undefined && !(await cards.holds(card, id))) return null;
+        return service.findPerson(id);
+      };
+      read().then(
+        (person) => {
+          const limits = card === undefined ? {} : { byCardIn: card.communityId };
+          done(null, person && { ...slim(person), ...limits });
+        },
+        (error: unknown) => {
+          done(error);
+        },
+      );
+    },
+  );
   return passport;
 }
 

@@ -6,6 +6,7 @@ export function toSessionState(
   person: Person | null,
   memberships: readonly MembershipEntity[],
   csrfToken: string,
+  cardMinutes: number,
 ): SessionState {
   return {
     person: person && { id: person.id, email: person.email, displayName: person.displayName },
@@ -16,6 +17,7 @@ export function toSessionState(
         communityName: membership.community.name,
         roles: membership.roles,
       })),
+    card: person?.byCardIn === undefined ? null : { leaveAfterMinutes: cardMinutes },
     csrfToken,
   };
 }

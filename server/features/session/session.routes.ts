@@ -1,3 +1,4 @@
+import { cardsEndpoints } from '#shared/contracts/cards.js';
 import { sessionEndpoints } from '#shared/contracts/session.js';
 import type { Request, RequestHandler, Router } from 'express';
 import type { Authenticator } from 'passport';
@@ -9,21 +10,26 @@ import { signInLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import { sessionHash } from '../../http/session-store.js';
+import type { CardHolderIn, CardSignInService } from '../cards/card-sign-in.service.js';
 import { describeBrowser } from './describe-browser.js';
 import type { DevicesService } from './devices.service.js';
 import { toSessionState } from './session.mapper.js';
 import type { SessionService } from './session.service.js';
 
-export function sessionRoutes(
-  router: Router,
-  mount: Mount,
-  service: SessionService,
-  devices: DevicesService,
-  passport: Authenticator,
-  clock: Clock,
-): void {
+interface SessionParts {
+  service: SessionService;
+  cards: CardSignInService;
+  devices: DevicesService;
+  passport: Authenticator;
+  clock: Clock;
+  /** After so long without use a session that a card opened is over. */
+  cardMinutes: number;
+}
+
+export function sessionRoutes(router: Router, mount: Mount, parts: SessionParts): void {
+  const { service, cards, devices, passport, clock, cardMinutes } = parts;
   const stateOf = async (request: Request, person: Person | null) =>
-    toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request, true));
+    toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request, true), cardMinutes);
 
   // The limits stand before the routes that guess: signing in, codes, and the present password.
   const [perAddress, perAccount] = signInLimits() as [RequestHandler, RequestHandler];
@@ -32,6 +38,9 @@ export function sessionRoutes(
     sessionEndpoints.redeemCode,
     sessionEndpoints.firstSteward,
     sessionEndpoints.resetPassword,
+    cardsEndpoints.open,
+    cardsEndpoints.choosePin,
+    cardsEndpoints.signIn,
   ]) {
     router[method.toLowerCase() as 'post'](path, perAddress, perAccount);
   }
@@ -68,6 +77,20 @@ export function sessionRoutes(
     return stateOf(request, person);
   });
 
+  const enterByCard = async (request: Request, { person, card }: CardHolderIn) => {
+    await logIn(request, person, clock.now());
+    request.session.card = card;
+    request.session.cookie.maxAge = cardMinutes * 60_000;
+    return stateOf(request, person);
+  };
+  mount.forAnybody(cardsEndpoints.open, ({ body }) => cards.open(body.code));
+  mount.forAnybody(cardsEndpoints.choosePin, async ({ request, body }) =>
+    enterByCard(request, await cards.choosePin(body.code, body.pin)),
+  );
+  mount.forAnybody(cardsEndpoints.signIn, async ({ request, body }) =>
+    enterByCard(request, await cards.signIn(body.code, body.pin)),
+  );
+
   mount.forPerson(sessionEndpoints.listDevices, async ({ request }, person) =>
     wholeList(await devices.list(person, sessionHash(request.sessionID))),
   );
@@ -82,7 +105,7 @@ export function sessionRoutes(
 
   /** Reading keeps the token of the session: several tabs share one. */
   async function stateOfPresent(request: Request, person: Person | null) {
-    return toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request));
+    return toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request), cardMinutes);
   }
 }
 

@@ -11,7 +11,7 @@ import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { OneTimeCodeEntity } from '../../db/entities/one-time-code.entity.js';
 import { PersonEntity } from '../../db/entities/person.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import type { Person } from '../../http/actor.js';
+import { membershipsHere, type Person } from '../../http/actor.js';
 import { AppError, conflict, invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
@@ -38,7 +38,7 @@ export class SessionService {
   async membershipsOf(person: Person | null): Promise<MembershipEntity[]> {
     if (person === null) return [];
     return this.dataSource.getRepository(MembershipEntity).find({
-      where: { personId: person.id },
+      where: membershipsHere(person),
       relations: { community: true },
       order: { community: { name: 'ASC' } },
     });

@@ -15,6 +15,9 @@ export const texts = {
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',
     'devices-signed-out': '{{actor}} signed out on other devices.',
+    'card-made': '{{actor}} made a sign-in card for {{subject}}.',
+    'card-ended': 'The sign-in card of {{subject}} ended: {{why}}.',
+    'card-first-used': '{{subject}} used their sign-in card for the first time.',
     'letters-chosen': '{{actor}} chose how to be asked.',
     'invitation-sent': '{{actor}} sent {{subject}} an invitation by e-mail.',
     'community-founded': '{{actor}} set up {{subject}}.',
@@ -80,6 +83,13 @@ export const texts = {
   reason: {
     'taken-back': 'taken back',
     'elder-asked': 'an elder asked for a change',
+  },
+  cardEnd: {
+    revoked: 'it was taken back',
+    replaced: 'a newer one took its place',
+    guessed: 'somebody typed ten wrong PINs',
+    left: 'they left the village',
+    roles: 'their new role needs a password',
   },
   answer: {
     agree: 'agree',

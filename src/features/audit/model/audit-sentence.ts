@@ -29,6 +29,7 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
     reason:
       details['reason'] === 'elder-asked' ? t('audit:reason.elder-asked') : t('audit:reason.taken-back'),
     state: isConsentState(details['state']) ? t(`audit:consent.${details['state']}`) : '',
+    why: isCardEnd(details['why']) ? t(`audit:cardEnd.${details['why']}`) : '',
     answer: isAnswer(details['answer']) ? t(`audit:answer.${details['answer']}`) : '',
   });
 }
@@ -55,6 +56,10 @@ function isLevel(value: unknown): value is SharingLevel {
 
 function isConsentState(value: unknown): value is keyof typeof texts.consent {
   return typeof value === 'string' && value in texts.consent;
+}
+
+function isCardEnd(value: unknown): value is keyof typeof texts.cardEnd {
+  return typeof value === 'string' && value in texts.cardEnd;
 }
 
 function isAnswer(value: unknown): value is keyof typeof texts.answer {

@@ -1,0 +1,147 @@
+import type { DrawnPage, Primitive, RectPrimitive } from './primitives.js';
+import { leadingMm, textBlock, type TextMeasurer, type TextStyle, wrapText } from './text-layout.js';
+
+/** What stands on a card with which somebody signs in. */
+export interface SignInCardModel {
+  readonly size: 'a6' | 'a7';
+  readonly title: string;
+  readonly villageName: string;
+  /** As the person wishes to be called on paper; empty for nobody's name. */
+  readonly name: string;
+  /** What to do with it, in one sentence. */
+  readonly how: string;
+  readonly care: string;
+  readonly address: string;
+  readonly codeGroups: readonly string[];
+  /** The code's squares, without the quiet ground around them. */
+  readonly squares: { readonly size: number; isDark(row: number, column: number): boolean };
+}
+
+interface Format {
+  readonly widthMm: number;
+  readonly heightMm: number;
+  readonly marginMm: number;
+  readonly squaresMm: number;
+  readonly title: TextStyle;
+  readonly village: TextStyle;
+  readonly name: TextStyle;
+  readonly words: TextStyle;
+  readonly code: TextStyle;
+}
+
+/** Lying postcards. A7 goes into a pocket; A6 has larger letters for older eyes. */
+const FORMATS: Record<SignInCardModel['size'], Format> = {
+  a6: {
+    widthMm: 148,
+    heightMm: 105,
+    marginMm: 7,
+    squaresMm: 54,
+    title: { role: 'legend', sizePt: 14, weight: 400, leadingEm: 1.25 },
+    village: { role: 'legend-name', sizePt: 20, weight: 700, leadingEm: 1.2 },
+    name: { role: 'legend-name', sizePt: 18, weight: 400, leadingEm: 1.2 },
+    words: { role: 'legend', sizePt: 14, weight: 400, leadingEm: 1.2 },
+    code: { role: 'legend-name', sizePt: 22, weight: 700, leadingEm: 1.2 },
+  },
+  a7: {
+    widthMm: 105,
+    heightMm: 74,
+    marginMm: 5,
+    squaresMm: 41,
+    title: { role: 'foot', sizePt: 12, weight: 400, leadingEm: 1.15 },
+    village: { role: 'legend-name', sizePt: 14, weight: 700, leadingEm: 1.15 },
+    name: { role: 'legend-name', sizePt: 14, weight: 400, leadingEm: 1.15 },
+    words: { role: 'foot', sizePt: 12, weight: 400, leadingEm: 1.15 },
+    code: { role: 'legend-name', sizePt: 17, weight: 700, leadingEm: 1.2 },
+  },
+};
+
+/** Squares are drawn in runs that overlap by a hair, so that no printer leaves a light line between them. */
+const OVERLAP_MM = 0.02;
+const QUIET_SQUARES = 4;
+
+/** One page: the squares to scan, beside them whose village it is and what to do, below them the letters to type. */
+export function layoutSignInCard(model: SignInCardModel, measurer: TextMeasurer): DrawnPage {
+  const format = FORMATS[model.size];
+  const { widthMm, heightMm, marginMm, squaresMm } = format;
+  const quietMm = (squaresMm * QUIET_SQUARES) / (model.squares.size + 2 * QUIET_SQUARES);
+  const left = marginMm + squaresMm + marginMm / 2;
+  const width = widthMm - marginMm - left;
+  const foot = footOf(model, format, measurer);
+
+  const primitives: Primitive[] = [];
+  let top = marginMm;
+  const put = (text: string, style: TextStyle, gapMm: number): void => {
+    const lines = wrapText(text, width, style, measurer);
+    const height = lines.length * leadingMm(style);
+    if (lines.length === 0 || top + height > foot.top) return;
+    primitives.push(textBlock(lines, { x: left, top }, style, measurer));
+    top += height + gapMm;
+  };
+  put(model.villageName, format.village, 0.5);
+  put(model.name, format.name, 0.5);
+  put(model.title, format.title, 1.5);
+  put(model.how, format.words, 1.5);
+  put(model.care, format.words, 0);
+  return {
+    name: model.title,
+    width: widthMm,
+    height: heightMm,
+    primitives: [
+      ...squaresOf(model, {
+        x: marginMm + quietMm,
+        y: marginMm + quietMm,
+        sideMm: squaresMm - 2 * quietMm,
+      }),
+      ...primitives,
+      ...foot.primitives,
+    ],
+  };
+}
+
+function squaresOf(
+  { squares: { size, isDark } }: SignInCardModel,
+  { x, y, sideMm }: { x: number; y: number; sideMm: number },
+): RectPrimitive[] {
+  const squareMm = sideMm / size;
+  const runs: RectPrimitive[] = [];
+  for (let row = 0; row < size; row += 1) {
+    for (let column = 0; column < size; column += 1) {
+      if (!isDark(row, column)) continue;
+      const from = column;
+      while (column + 1 < size && isDark(row, column + 1)) column += 1;
+      runs.push({
+        type: 'rect',
+        role: 'code',
+        x: x + from * squareMm,
+        y: y + row * squareMm,
+        width: (column - from + 1) * squareMm,
+        height: squareMm + OVERLAP_MM,
+        fill: 'solid',
+        strokeMm: 0,
+        cornerMm: 0,
+      });
+    }
+  }
+  return runs;
+}
+
+/** The letters and the address, for a phone that cannot scan: from the bottom edge upwards. */
+function footOf(
+  { codeGroups, address }: SignInCardModel,
+  { widthMm, heightMm, marginMm, code, words }: Format,
+  measurer: TextMeasurer,
+): { primitives: Primitive[]; top: number } {
+  const width = widthMm - 2 * marginMm;
+  const addressLines = wrapText(address, width, words, measurer);
+  const codeLines = wrapText(codeGroups.join('  '), width, code, measurer);
+  const addressTop = heightMm - marginMm - addressLines.length * leadingMm(words);
+  const top = addressTop - codeLines.length * leadingMm(code);
+  const x = marginMm + 1;
+  return {
+    top,
+    primitives: [
+      textBlock(codeLines, { x, top }, code, measurer),
+      textBlock(addressLines, { x, top: addressTop }, words, measurer),
+    ],
+  };
+}
