@@ -1,6 +1,6 @@
 import session from 'express-session';
 import type { RequestHandler } from 'express';
-import type { SessionDevice } from '../db/entities/session.entity.js';
+import type { SessionCard, SessionDevice } from '../db/entities/session.entity.js';
 import type { AppContext } from './context.js';
 import { SessionStore } from './session-store.js';
 
@@ -11,11 +11,6 @@ declare module 'express-session' {
     /** The card that opened it, and the one village that it opens. */
     card?: SessionCard;
   }
-}
-
-export interface SessionCard {
-  id: string;
-  communityId: string;
 }
 
 const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;

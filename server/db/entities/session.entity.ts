@@ -8,6 +8,12 @@ export interface SessionDevice {
   system: string | null;
 }
 
+/** The card that opened a session, and the one village that it opens; within `data`, too. */
+export interface SessionCard {
+  id: string;
+  communityId: string;
+}
+
 /** A browser's session. The id is kept as a hash: a stolen table opens no session. */
 @Entity({ name: 'session' })
 export class SessionEntity {
