@@ -210,9 +210,11 @@ export function createApp(options: AppOptions): App {
   const answers = new AnswersService(dataSource, clock);
   reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
+  const erasers = erasersOf(attachmentFiles, clock);
+  const withdrawals = new WithdrawalsService(dataSource, clock, erasers, options.withdrawals);
   attachmentsRoutes(
     mount,
-    new AttachmentsService(dataSource, clock, attachmentFiles),
+    new AttachmentsService(dataSource, clock, attachmentFiles, withdrawals),
     new AttachmentReadingService(dataSource, clock, options.storage),
     new AttachmentWordsService(dataSource, clock),
   );
@@ -225,12 +227,7 @@ export function createApp(options: AppOptions): App {
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
-  const erasers = erasersOf(attachmentFiles, clock);
-  withdrawalsRoutes(
-    mount,
-    new WithdrawalsService(dataSource, clock, erasers, options.withdrawals),
-    new ItemStatesService(dataSource, clock),
-  );
+  withdrawalsRoutes(mount, withdrawals, new ItemStatesService(dataSource, clock));
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
   consentsRoutes(mount, consents, new ConsentCardService(dataSource, consents));
   auditRoutes(mount, new AuditListService(dataSource, clock));

@@ -25,7 +25,6 @@ export const AUDIT_ACTIONS = [
   'figure-put-back',
   'attachment-added',
   'attachment-words-written',
-  'attachment-removed',
   'group-founded',
   'group-changed',
   'sharing-tightened',

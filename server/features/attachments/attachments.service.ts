@@ -18,6 +18,7 @@ import { personNames } from '../people/person-names.service.js';
 import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { expectKnownPeople } from '../sharing/known-people.service.js';
+import type { WithdrawalsService } from '../withdrawals/withdrawals.service.js';
 import { mayRemove, type SeenAttachment } from './attachment-access.service.js';
 import { recordAttachment } from './attachment-audit.js';
 import {
@@ -43,6 +44,7 @@ export class AttachmentsService {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly files: AttachmentFilesService,
+    private readonly withdrawals: Pick<WithdrawalsService, 'withdraw'>,
   ) {}
 
   async list(actor: Actor, subject: AttachmentSubject): Promise<Attachment[]> {
@@ -106,19 +108,13 @@ export class AttachmentsService {
     return this.describeOwn(actor, await ownAttachment(manager, actor, attachmentId));
   }
 
-  /** Rows first, files once that is certain; what a failure in between leaves behind is swept away at the next start. */
+  /** For whoever brought or gave it. It is withdrawn like everything else that is taken back. */
   async remove(actor: Actor, attachmentId: string): Promise<void> {
     const viewer = await this.viewer(actor);
     const seen = await readable(this.dataSource.manager, viewer, attachmentId);
     if (!mayRemove(viewer, seen)) throw conflict('not-yours');
-    const gone = await inTransaction(this.dataSource, async (manager) => {
-      await lockAttachment(manager, attachmentId);
-      const parts = await manager.findBy(AttachmentPartEntity, { attachmentId });
-      await manager.delete(AttachmentEntity, { id: attachmentId });
-      await recordAttachment(manager, this.clock, actor, 'attachment-removed', seen.row);
-      return parts;
-    });
-    await this.files.remove(gone);
+    const withdrawal = { leavesTrace: false, askedById: null };
+    await this.withdrawals.withdraw(actor, 'attachment', attachmentId, withdrawal);
   }
 
   private viewer(actor: Actor): Promise<Viewer> {

@@ -30,7 +30,6 @@ export const texts = {
     'figure-put-back': '{{actor}} put the figure {{subject}} back.',
     'attachment-added': '{{actor}} added {{what}}.',
     'attachment-words-written': '{{actor}} wrote out the words of {{what}}.',
-    'attachment-removed': '{{actor}} removed {{what}}.',
     'group-founded': '{{actor}} founded the group {{subject}}.',
     'group-changed': '{{actor}} changed who belongs to the group {{subject}}.',
     'sharing-tightened': '{{actor}} made the circle of “{{subject}}” narrower: {{level}}.',

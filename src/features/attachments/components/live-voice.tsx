@@ -3,6 +3,8 @@ import { useTranslation } from 'react-i18next';
 import { clockOf } from '../model/length-words.js';
 
 const LOOKS_MS = 100;
+/** People breathe between words: only a longer silence is one. */
+const SILENCE_S = 3;
 /** How much louder than silence a voice is, of the loudest that the microphone can say. */
 const HEARD = 0.015;
 /** The bar is full long before that: people do not shout. */
@@ -13,18 +15,22 @@ export function LiveVoice({ stream, before, part }: { stream: MediaStream; befor
   const { t } = useTranslation('attachments');
   const [seconds, setSeconds] = useState(0);
   const [loudness, setLoudness] = useState(0);
+  const [heardAtS, setHeardAtS] = useState(0);
   const read = useLoudness(stream);
   useEffect(() => {
     const from = performance.now();
     const timer = setInterval(() => {
-      setSeconds((performance.now() - from) / 1000);
-      setLoudness(read.current());
+      const nowS = (performance.now() - from) / 1000;
+      const loudNow = read.current();
+      setSeconds(nowS);
+      setLoudness(loudNow);
+      if (loudNow > HEARD) setHeardAtS(nowS);
     }, LOOKS_MS);
     return () => {
       clearInterval(timer);
     };
   }, [read]);
-  const isHeard = loudness > HEARD;
+  const isHeard = seconds - heardAtS < SILENCE_S;
   return (
     <div className="live-voice">
       <p className="flex flex-wrap items-center gap-3">
