@@ -13,6 +13,7 @@ import { removeOldLetters } from './features/letters/letter-rounds.service.js';
 import { removeExpiredSessions } from './features/session/end-sessions.service.js';
 import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
+import { openServer } from './http/timeouts.js';
 import type { DevInbox } from './mail/inbox.js';
 import { createSmtpMailer } from './mail/smtp-mailer.js';
 import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
@@ -24,8 +25,6 @@ import { LocalFileStore } from './storage/local-file-store.js';
 
 const DAY_MS = 24 * 60 * 60 * 1000;
 const LETTER_ROUND_MS = 20_000;
-/** A picture over a village's slow network takes a quarter of an hour. */
-const SLOW_UPLOAD_MS = 30 * 60 * 1000;
 
 /** A reason not to start that the person at the machine can mend: one sentence, no stack. */
 class StartRefused extends Error {}
@@ -115,15 +114,14 @@ async function openInbox({ mail }: Config): Promise<DevInbox | null> {
 
 function listen(express: ReturnType<typeof createApp>['express'], config: Config): Promise<Server> {
   return new Promise((resolve, reject) => {
-    const server = express.listen(config.port, config.host, (error?: Error) => {
-      if (error) {
-        reject(
-          new StartRefused(`PORT ${config.port} cannot be used (${error.message}): set PORT to a free one.`),
-        );
-      } else {
-        server.requestTimeout = SLOW_UPLOAD_MS;
-        resolve(server);
-      }
+    const server = openServer(express);
+    server.once('error', (error) => {
+      reject(
+        new StartRefused(`PORT ${config.port} cannot be used (${error.message}): set PORT to a free one.`),
+      );
+    });
+    server.listen(config.port, config.host, () => {
+      resolve(server);
     });
   });
 }

@@ -3,8 +3,6 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { MembershipEntity } from '#server/db/entities/membership.entity.js';
 import { SessionEntity } from '#server/db/entities/session.entity.js';
 import { SessionStore } from '#server/http/session-store.js';
-import { ENDPOINTS } from '#shared/contracts/index.js';
-import type { Problem } from '#shared/contracts/problem.js';
 import type { Device } from '#shared/contracts/session.js';
 import { DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { openTestApi, TEST_NOW, type Client, type TestApi } from '#tests/support/api.js';
@@ -117,16 +115,4 @@ describe('guessing', () => {
     const body = { email: 'officer@dawnpeg.example', password: DEMO_PASSWORD };
     await visitor.post('/api/session', body).expect(429);
   });
-});
-
-describe('every write', () => {
-  it.each(ENDPOINTS.filter(({ method }) => method !== 'GET').map((one) => [one.id, one] as const))(
-    '%s is refused without the token of the session',
-    async (_id, { method, path }) => {
-      const { express } = api.app;
-      const way = path.replace(/:\w*Id/gu, '0190a3a0-0000-7000-8000-000000000001').replace(':number', '1');
-      const answer = await request(express)[method.toLowerCase() as 'post'](way).send({});
-      expect([answer.status, (answer.body as Problem).type]).toEqual([403, '/problems/csrf-token']);
-    },
-  );
 });
