@@ -1,7 +1,4 @@
-import { readdirSync, readFileSync } from 'node:fs';
-import path from 'node:path';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { z } from 'zod';
 import { erasersOf } from '#server/features/withdrawals/erasers.service.js';
 import { replayWithdrawals } from '#server/features/withdrawals/replay.service.js';
 import { AttachmentFilesService } from '#server/features/attachments/attachment-files.service.js';
@@ -26,6 +23,7 @@ import {
 } from '#tests/support/calendar-api.js';
 import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 import { addFigure } from '#tests/support/figure-api.js';
+import { copyTables, filesWith, putBack, tablesWith } from '#tests/support/search-everything.js';
 import { addVariant } from '#tests/support/variant-api.js';
 import { furnishLevels } from '#tests/support/levelled-village.js';
 
@@ -74,7 +72,7 @@ describe('a withdrawn entry', () => {
       await api.signIn('staff'),
       await api.signIn('observer'),
     ];
-    expect(await tablesWith(WORD)).not.toEqual([]);
+    expect(await tablesWith(api, WORD)).not.toEqual([]);
   });
 
   it('is found nowhere any more, in tables, files, answers, prints and records', async () => {
@@ -111,13 +109,13 @@ describe('a withdrawn entry', () => {
   });
 
   it('stays gone when older tables are put back: the next start takes it out again', async () => {
-    const copy = await copyTables();
+    const copy = await copyTables(api);
     await withdraw(village.elder, 'entry', entry.id).expect(204);
-    await putBack(copy);
-    expect(await tablesWith(WORD)).not.toEqual([]);
+    await putBack(api, copy);
+    expect(await tablesWith(api, WORD)).not.toEqual([]);
     const erasers = erasersOf(new AttachmentFilesService(api.storage, null), api.clock);
     expect(await replayWithdrawals(api.dataSource, erasers, api.withdrawals)).toBeGreaterThan(0);
-    expect([...(await tablesWith(WORD)), ...filesWith(WORD)]).toEqual([]);
+    expect([...(await tablesWith(api, WORD)), ...filesWith(api, WORD)]).toEqual([]);
     expect(await replayWithdrawals(api.dataSource, erasers, api.withdrawals)).toBe(0);
   });
 
@@ -167,11 +165,11 @@ describe('a withdrawn entry', () => {
     await withdraw(village.elder, 'entry', entry.id).expect(204);
     expect((await readVersion(village.officer, second)).entries).toHaveLength(1);
     expect((await publish(village, await readVersion(village.officer, second))).state).toBe('published');
-    expect(await tablesWith(WORD)).toEqual([]);
+    expect(await tablesWith(api, WORD)).toEqual([]);
   });
 
   async function placesWith(word: string): Promise<string[]> {
-    const found = [...(await tablesWith(word)), ...filesWith(word)];
+    const found = [...(await tablesWith(api, word)), ...filesWith(api, word)];
     const askable = {
       params: {
         communityId: [village.officer.communityId],
@@ -224,9 +222,9 @@ describe('a withdrawn figure', () => {
       lead: { type: 'marker', markerKey: figure.markerKey, phenomenon: 'heliacal-rising', occurrence: 1 },
     });
     const published = await publish(village, await submit(village.officer, calendarId));
-    expect(await tablesWith(WORD)).not.toEqual([]);
+    expect(await tablesWith(api, WORD)).not.toEqual([]);
     await withdraw(village.officer, 'figure', figure.id).expect(204);
-    expect([...(await tablesWith(WORD)), ...filesWith(WORD)]).toEqual([]);
+    expect([...(await tablesWith(api, WORD)), ...filesWith(api, WORD)]).toEqual([]);
     const seen = await readVersion(village.elder, published);
     expect(seen).toMatchObject({ headerComplete: false, header: { markers: [{ name: 'Aldebaran' }] } });
     expect(seen.entries).toHaveLength(1);
@@ -332,7 +330,7 @@ describe('a name that is taken off', () => {
     await village.elder
       .post(`/api/communities/${village.elder.communityId}/items/entry/${entry.id}/name-removal`)
       .expect(204);
-    expect(await tablesWith(WORD)).toEqual([]);
+    expect(await tablesWith(api, WORD)).toEqual([]);
     const [seen] = (await readVersion(village.officer, published)).entries;
     expect(seen).toMatchObject({ entryId: entry.id, redacted: true, content: { giver: '' } });
   });
@@ -349,7 +347,7 @@ describe('things of every level', () => {
     const kept = entries.filter(({ content }) => content.sharingLevel !== 'open');
     for (const { id } of kept) await withdraw(village.elder, 'entry', id).expect(204);
     const words = kept.map(({ content }) => content.titleVillage);
-    for (const word of words) expect([word, await tablesWith(word)]).toEqual([word, []]);
+    for (const word of words) expect([word, await tablesWith(api, word)]).toEqual([word, []]);
     expect(await entriesOf(village.officer, village.calendarId)).toHaveLength(1);
     const path = versionPath({ calendarId: village.calendarId, number: village.publishedNumber });
     expect((await village.officer.get(path).expect(200)).body).toMatchObject({ entryCount: 1 });
@@ -364,75 +362,6 @@ function withdraw(
 ) {
   const path = `/api/communities/${client.communityId}/items/${itemType}/${itemId}/withdrawal`;
   return client.post(path, { leavesTrace: false, askedById: null, ...changes });
-}
-
-const columnRow = z.object({ TABLE_NAME: z.string(), COLUMN_NAME: z.string() });
-
-/** Every table and column in which the word stands, whatever the tables are. */
-async function tablesWith(word: string): Promise<string[]> {
-  const columns = z.array(columnRow).parse(
-    await api.dataSource.query(
-      `SELECT TABLE_NAME, COLUMN_NAME FROM information_schema.COLUMNS WHERE TABLE_SCHEMA = DATABASE()
-       AND DATA_TYPE IN ('varchar', 'char', 'text', 'mediumtext', 'longtext', 'json', 'blob', 'longblob')`,
-    ),
-  );
-  const found: string[] = [];
-  for (const { TABLE_NAME: table, COLUMN_NAME: column } of columns) {
-    const rows: unknown[] = await api.dataSource.query(
-      `SELECT 1 FROM \`${table}\` WHERE \`${column}\` LIKE ? LIMIT 1`,
-      [`%${word}%`],
-    );
-    if (rows.length > 0) found.push(`${table}.${column}`);
-  }
-  return found;
-}
-
-/** Every file of the product's folder in which the word stands. */
-function filesWith(word: string): string[] {
-  return readdirSync(api.dataDir, { recursive: true, withFileTypes: true })
-    .filter((file) => file.isFile())
-    .map((file) => path.join(file.parentPath, file.name))
-    .filter((file) => readFileSync(file).includes(word));
-}
-
-type Copy = Map<string, Record<string, unknown>[]>;
-
-async function copyTables(): Promise<Copy> {
-  const copy: Copy = new Map();
-  for (const table of await tableNames()) {
-    copy.set(table, await api.dataSource.query(`SELECT * FROM \`${table}\``));
-  }
-  return copy;
-}
-
-/** As somebody who restores a dump: everything that is there is replaced. */
-async function putBack(copy: Copy): Promise<void> {
-  const runner = api.dataSource.createQueryRunner();
-  await runner.query('SET FOREIGN_KEY_CHECKS = 0');
-  for (const [table, rows] of copy) {
-    await runner.query(`DELETE FROM \`${table}\``);
-    for (const row of rows) {
-      const names = Object.keys(row).map((name) => `\`${name}\``);
-      const marks = names.map(() => '?').join(', ');
-      await runner.query(
-        `INSERT INTO \`${table}\` (${names.join(', ')}) VALUES (${marks})`,
-        Object.values(row),
-      );
-    }
-  }
-  await runner.query('SET FOREIGN_KEY_CHECKS = 1');
-  await runner.release();
-}
-
-async function tableNames(): Promise<string[]> {
-  const rows = z
-    .array(z.object({ TABLE_NAME: z.string() }))
-    .parse(
-      await api.dataSource.query(
-        "SELECT TABLE_NAME FROM information_schema.TABLES WHERE TABLE_SCHEMA = DATABASE() AND TABLE_NAME <> 'schema_migration'",
-      ),
-    );
-  return rows.map(({ TABLE_NAME }) => TABLE_NAME);
 }
 
 function isClient(value: unknown): value is Client {
