@@ -23,6 +23,7 @@ import { texts as sheets } from './en/sheets.js';
 import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
 import { texts as today } from './en/today.js';
+import { texts as variants } from './en/variants.js';
 import { texts as versions } from './en/versions.js';
 import { texts as withdrawals } from './en/withdrawals.js';
 
@@ -56,6 +57,7 @@ export const en = {
   problems,
   sky,
   today,
+  variants,
   versions,
   withdrawals,
 } as const;

@@ -480,6 +480,7 @@ export const texts = {
       ifLate: 'If late',
       giver: 'Who gave it',
       agreedToPrint: 'Agreed to print',
+      board: 'What the board shows',
       sharingLevel: 'Who may see it',
     },
     theirs: 'Saved by {{name}}',

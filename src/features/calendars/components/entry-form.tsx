@@ -20,6 +20,7 @@ import { LateFields, SignsFields, WhoseFields } from './other-fields.js';
 import { StaleChoice } from './stale-choice.js';
 import { UnsavedLine } from './unsaved-line.js';
 import { useGroups, type Groups } from './use-groups.js';
+import { VariantsPanel } from './variants-panel.js';
 import { WhatFields } from './what-fields.js';
 import { WhenFields } from './when-fields.js';
 
@@ -91,6 +92,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             onWay={(way) => goWay(way, form, groups, search)}
           />
           <GroupFolds form={form} groups={groups} onSearch={search} />
+          {saved && <VariantsPanel editor={editor} form={form} />}
           <UnsavedLine editor={editor} entry={entry} actions={actions} />
         </>
       )}

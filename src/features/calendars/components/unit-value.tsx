@@ -20,7 +20,7 @@ export function UnitValue({
   content: EntryInput;
   markers: NamesByKey;
 }) {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'variants']);
   const dates = useDateWords();
   const words = useEntryWords();
   const sharing = useSharingWords();
@@ -51,6 +51,10 @@ export function UnitValue({
         day: dates.day({ year: PLAIN_YEAR, ...content.lastDate.date }),
         source: content.lastDate.source,
       });
+    case 'board':
+      return content.board
+        ? t('variants:board.reasonShown', { reason: content.board.reason })
+        : t('variants:board.entry.name');
     case 'agreedToPrint':
       return t(content.agreedToPrint ? 'stale.yes' : 'stale.no');
     case 'sharingLevel':

@@ -14,7 +14,14 @@ import { SignFields } from './sign-fields.js';
 import { WindowPicture } from './window-picture.js';
 
 /** When it is done: what leads, four days from it, and what may cut them short. */
-export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () => void }) {
+export interface WhenFieldsProps {
+  form: FormState;
+  onSearch: () => void;
+  /** Beside an entry: the last date is that one's. */
+  timingOnly?: boolean | undefined;
+}
+
+export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
   const { t } = useTranslation('calendars');
   const days = useMarkerDayWords();
   const { draft, change, dates } = form;
@@ -43,7 +50,7 @@ export function WhenFields({ form, onSearch }: { form: FormState; onSearch: () =
         <OffsetSteppers form={form} />
         <WindowPicture form={form} />
       </div>
-      <LastDateFields form={form} />
+      {timingOnly !== true && <LastDateFields form={form} />}
     </div>
   );
 }

@@ -32,7 +32,7 @@ export type FieldGroup = 'what' | 'when' | 'signs' | 'late' | 'whose';
 
 const GROUPS: Record<FieldGroup, readonly (keyof EntryInput)[]> = {
   what: ['titleVillage', 'titleOfficer', 'kind', 'icon', 'crop', 'notes', 'caution'],
-  when: ['lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch'],
+  when: ['board', 'lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch'],
   signs: ['otherSigns'],
   late: ['ifLate'],
   whose: ['giver', 'giverId', 'agreedToPrint', 'sharingLevel', 'sharing'],

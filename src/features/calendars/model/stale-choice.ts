@@ -21,6 +21,7 @@ export const UNITS = {
   ifLate: ['ifLate'],
   giver: ['giver'],
   agreedToPrint: ['agreedToPrint'],
+  board: ['board'],
   sharingLevel: ['sharingLevel', 'sharing', 'giverId'],
 } as const satisfies Record<string, readonly (keyof EntryInput)[]>;
 

@@ -2,6 +2,7 @@ import { Trans, useTranslation } from 'react-i18next';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { VariantList } from '#src/lib/variant-list.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useEntrySentences } from '../model/entry-sentences.js';
@@ -9,7 +10,7 @@ import { EntryDays } from './entry-days.js';
 
 /** One entry as an elder reads it: the village's words first, then when, then everything that belongs to it. */
 export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
-  const { t } = useTranslation('reviews');
+  const { t } = useTranslation(['reviews', 'variants']);
   const sharing = useSharingWords();
   const words = useDateWords();
   const { content, dates } = entry;
@@ -58,6 +59,17 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
       <Part title={t('ifLate')} text={content.ifLate} />
       <Part title={t('crop')} text={content.crop} />
       <Part title={t('notes')} text={content.notes} />
+      {entry.variants !== undefined && (
+        <section className="grid gap-2">
+          <h2>{t('variants:title')}</h2>
+          <p className="text-small text-umber-soft">{t('variants:lead')}</p>
+          <VariantList
+            variants={entry.variants}
+            year={header.year}
+            markers={new Map(header.markers.map((marker) => [marker.markerKey, marker]))}
+          />
+        </section>
+      )}
       {content.caution !== '' && (
         <Care>
           <p>{content.caution}</p>
