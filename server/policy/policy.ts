@@ -25,8 +25,7 @@ export type Appearance = 'full' | 'blank' | 'none';
 export function appearance(viewer: Viewer, shared: Shared | undefined): Appearance {
   if (shared?.communityId !== viewer.communityId) return 'none';
   if (shared.state !== 'shared') return 'none';
-  // The giver alone still sees what their consent hides: they are to know what they are asked about again.
-  if (!isAgreedToShow(shared, viewer.today)) return shared.giverId === viewer.personId ? 'full' : 'none';
+  if (!isAgreedToShow(shared, viewer.today)) return 'none';
   if (isTold(viewer, shared)) return 'full';
   return effectiveLevel(shared, viewer.today) === 'sealed' ? 'none' : shared.details.trace;
 }

@@ -69,6 +69,19 @@ describe('what is written down', () => {
     expect([answer.status, refusedFields(answer)]).toEqual([422, [[field, code]]]);
   });
 
+  it('takes nobody’s own word for what somebody else gave, unless they were asked about it', async () => {
+    const { officer, elder, elder2, millet } = village;
+    const mine = consentContent({ giverId: officer.personId, proof: null });
+    const body = { ...mine, itemType: 'entry', itemId: millet };
+    expect(refusedFields(await officer.post(consentsPath(officer), body))).toEqual([
+      ['proof', 'proof-required'],
+    ]);
+    const consent = await addConsent(elder, 'entry', millet, asked({ giverId: elder2.personId }));
+    const said = consentContent({ giverId: elder2.personId, proof: null });
+    const given = await changeConsent(elder2, consent, said).expect(200);
+    expect((given.body as Consent).content.proof?.kind).toBe('own-word');
+  });
+
   it('is about each person once', async () => {
     const { officer, elder } = village;
     await addConsent(officer, 'entry', village.millet, { giverId: elder.personId });

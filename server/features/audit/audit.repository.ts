@@ -8,7 +8,7 @@ import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
-import { appearance, type Appearance } from '../../policy/policy.js';
+import { appearance, maySeeByLevel, type Appearance } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
@@ -108,7 +108,12 @@ export async function subjectAppearances(
   for (const type of LEVELLED) {
     const ids = rows.flatMap((row) => (row.subjectType === type && row.subjectId ? [row.subjectId] : []));
     const shared = await sharedById(manager, type, ids);
-    for (const id of ids) found.set(`${type} ${id}`, appearance(viewer, shared.get(id)));
+    for (const id of ids) {
+      const thing = shared.get(id);
+      const seen = appearance(viewer, thing);
+      // What only a missing yes hides leaves its records, without its name, to those who may see it by its level.
+      found.set(`${type} ${id}`, seen === 'none' && maySeeByLevel(viewer, thing) ? 'blank' : seen);
+    }
   }
   return ({ subjectType, subjectId }) =>
     LEVELLED.some((type) => type === subjectType)

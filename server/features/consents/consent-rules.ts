@@ -22,15 +22,15 @@ export function mayOf(
 }
 
 export function mayAsk(actor: Member, thing: ConsentThing): boolean {
-  return thing.shared.giverId === actor.person.id || (thing.isSeen && keeps(actor));
+  return thing.giverId === actor.person.id || (thing.isSeen && keeps(actor));
 }
 
 function keeps(actor: Member): boolean {
   return hasRole(actor, 'officer', 'steward', 'elder');
 }
 
-function isGiver(actor: Member, { giverId }: Pick<ConsentEntity, 'giverId'>, { shared }: ConsentThing) {
-  return giverId === actor.person.id || shared.giverId === actor.person.id;
+function isGiver(actor: Member, { giverId }: Pick<ConsentEntity, 'giverId'>, thing: ConsentThing) {
+  return giverId === actor.person.id || thing.giverId === actor.person.id;
 }
 
 /** What was answered once is not asked as if for the first time: until a new yes it stays as it is. */
@@ -40,11 +40,16 @@ export function expectAnswerFollows(before: ConsentEntity['state'], { answer }: 
 
 /**
  * A yes has its proof; the givers' own is that they said it themselves, signed in. Nobody says "own word" for somebody
- * else. A no needs none.
+ * else, nor about what somebody else gave unless they were asked about it. A no needs none.
  */
-export function withProof(actor: Actor, content: ConsentContent, prefix: string): ConsentContent {
+export function withProof(
+  actor: Actor,
+  content: ConsentContent,
+  asked: { giverId: string | null },
+  prefix: string,
+): ConsentContent {
   const { proof, giverId } = content;
-  const isOwn = giverId === actor.person.id;
+  const isOwn = giverId === actor.person.id && asked.giverId === actor.person.id;
   if (proof?.kind === 'own-word' && !isOwn) throw invalidField(`${prefix}proof.kind`, 'own-word-of-giver');
   if (isOwn && proof === null) {
     return { ...content, proof: { kind: 'own-word', witness: '', attachmentId: null } };

@@ -20,6 +20,10 @@ export interface ConsentThing {
   isSeen: boolean;
   /** Null where it is not theirs to see, or has no name. */
   title: string | null;
+  /** The giver, where they are one of the village's people: not whoever wrote down what somebody else gave. */
+  giverId: string | null;
+  /** As the thing itself calls them; empty where it does not. */
+  giverName: string;
 }
 
 export async function consentThings(
@@ -61,6 +65,9 @@ export async function consentThings(
     const isSeen =
       maySeeByLevel(viewer, own) && (figureId === null || maySeeByLevel(viewer, shared.figure.get(figureId)));
     const title = itemType === 'entry' ? entries.get(itemId)?.titleOfficer : names.get(itemId);
-    return { shared: own, isSeen, title: isSeen ? (title ?? null) : null };
+    const content = itemType === 'entry' ? entries.get(itemId) : undefined;
+    const giverName = content?.giver ?? '';
+    const giverId = content?.giverId ?? (giverName === '' ? own.giverId : null);
+    return { shared: own, isSeen, title: isSeen ? (title ?? null) : null, giverId, giverName };
   };
 }

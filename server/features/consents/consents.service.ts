@@ -64,7 +64,8 @@ export class ConsentsService {
     const readable = (await this.describe(manager, actor, rows)).filter(({ may }) => may.read);
     if (thing === undefined || (!thing.isSeen && readable.length === 0)) throw notFound();
     const asks = mayAsk(actor, thing);
-    const { giverId, level } = thing.shared;
+    const { giverId, giverName } = thing;
+    const { level } = thing.shared;
     const names = await personNames(manager, [giverId, ...readable.map(({ row }) => row.recordedBy)]);
     const nameOf = (id: string | null) => (id === null ? '' : (names.get(id) ?? ''));
     return {
@@ -73,7 +74,7 @@ export class ConsentsService {
       level,
       title: thing.title,
       giverId: asks ? giverId : null,
-      giverName: asks ? nameOf(giverId) : '',
+      giverName: asks ? giverName || nameOf(giverId) : '',
       items: readable.map((facts) => toConsent(facts, nameOf(facts.row.recordedBy))),
       mayAsk: asks,
     };
@@ -91,7 +92,7 @@ export class ConsentsService {
       const thing = await this.thing(manager, actor, { itemType, itemId });
       if (thing === undefined || !thing.isSeen) throw notFound();
       expectMayAsk(actor, thing);
-      const content = withProof(actor, input, '');
+      const content = withProof(actor, input, thing, '');
       await expectKnown(manager, actor, content, id, '');
       const { giverId } = content;
       if (giverId !== null && (await manager.existsBy(ConsentEntity, { itemType, itemId, giverId }))) {
@@ -114,7 +115,12 @@ export class ConsentsService {
       const thing = await this.thing(manager, actor, row);
       if (thing === undefined || !mayOf(actor, row, thing).read) throw notFound();
       if (row.version !== update.version) throw stale(await this.one(manager, actor, row), update.content);
-      const content = withProof(actor, update.content, 'content.');
+      const content = withProof(
+        actor,
+        update.content,
+        row.giverId === actor.person.id ? row : thing,
+        'content.',
+      );
       expectAnswerFollows(row.state, content);
       await expectKnown(manager, actor, content, consentId, 'content.');
       await this.update(manager, row, { ...toColumns(content, thing), ...this.writer(actor) });

@@ -153,7 +153,7 @@ export const texts = {
     keep: {
       short: 'keep',
       name: 'Keep it',
-      why: 'Dawnpeg keeps it for the village. Without this it is hidden from everybody else.',
+      why: 'Dawnpeg keeps it for the village. Without this it is hidden from everybody.',
     },
     show: {
       short: 'show',
