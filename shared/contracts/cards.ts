@@ -142,7 +142,11 @@ export const cardsEndpoints = {
 } as const;
 
 function isEasy(digits: string): boolean {
-  const steps = new Set([...digits].slice(1).map((digit, index) => Number(digit) - Number(digits[index])));
+  const steps = new Set(
+    Array.from(digits)
+      .slice(1)
+      .map((digit, index) => Number(digit) - Number(digits[index])),
+  );
   const [step = 9] = steps;
   return steps.size === 1 && Math.abs(step) <= 1;
 }

@@ -14,7 +14,7 @@ export interface SignInCardModel {
   readonly address: string;
   readonly codeGroups: readonly string[];
   /** The code's squares, without the quiet ground around them. */
-  readonly squares: { readonly size: number; isDark(row: number, column: number): boolean };
+  readonly squares: { readonly size: number; readonly isDark: (row: number, column: number) => boolean };
 }
 
 interface Format {

@@ -15,6 +15,7 @@ export interface AppRoute {
 /** Screens before the door: anybody may open them. */
 export const doorRoutes: readonly AppRoute[] = [
   { path: PATTERNS.signIn, texts: ['session'], load: () => import('./routes/sign-in.js') },
+  { path: PATTERNS.card, texts: ['cards', 'session'], load: () => import('./routes/card.js') },
   { path: PATTERNS.reset, texts: ['session', 'letters'], load: () => import('./routes/reset.js') },
   { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
 ];
@@ -116,6 +117,11 @@ export const villageRoutes: readonly AppRoute[] = [
     path: PATTERNS.takeBack,
     texts: ['withdrawals', 'sharing'],
     load: () => import('./routes/take-back.js'),
+  },
+  {
+    path: PATTERNS.villageCards,
+    texts: ['cards', 'people'],
+    load: () => import('./routes/village-cards.js'),
   },
   { path: PATTERNS.villageSettings, texts: ['people'], load: () => import('./routes/village-settings.js') },
 ];

@@ -39,6 +39,11 @@ export async function callApi<E extends Endpoint>(endpoint: E, input: CallInput<
   });
 }
 
+/** The same for an endpoint that answers with a file. */
+export async function callApiForFile<E extends Endpoint>(endpoint: E, input: CallInput<E>): Promise<Blob> {
+  return (await send(endpoint, input as LooseInput, true)).blob();
+}
+
 /** Address of an endpoint with its parameters filled in: for links to files. */
 export function apiUrl<E extends Endpoint>(
   endpoint: E,

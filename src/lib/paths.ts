@@ -5,6 +5,7 @@ export const PATTERNS = {
   today: '/',
   look: '/look',
   signIn: '/sign-in',
+  card: '/card',
   welcome: '/welcome',
   reset: '/reset',
   account: '/account',
@@ -25,6 +26,7 @@ export const PATTERNS = {
   changeFigure: '/figures/:figureId/change',
   villageSettings: '/village/settings',
   villageRecords: '/village/records',
+  villageCards: '/village/cards',
   villageAsking: '/village/asking',
   villageGroups: '/village/groups',
   villageConsents: '/village/consents',
@@ -74,6 +76,8 @@ export const paths = {
   /** The code travels behind the hash: it never reaches a server's log. */
   welcome: (code?: string) =>
     code === undefined ? PATTERNS.welcome : `${PATTERNS.welcome}#code=${encodeURIComponent(code)}`,
+  /** Printed cards carry their code behind the hash. */
+  card: () => PATTERNS.card,
   reset: () => PATTERNS.reset,
   account: () => PATTERNS.account,
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
@@ -99,6 +103,7 @@ export const paths = {
   changeFigure: (figureId: string) => `/figures/${encodeURIComponent(figureId)}/change`,
   villageSettings: () => PATTERNS.villageSettings,
   villageRecords: () => PATTERNS.villageRecords,
+  villageCards: () => PATTERNS.villageCards,
   villageAsking: () => PATTERNS.villageAsking,
   villageGroups: () => PATTERNS.villageGroups,
   villageConsents: () => PATTERNS.villageConsents,

@@ -42,7 +42,7 @@ async function cardInUse(): Promise<{ code: string; client: Client }> {
 async function tryPin(code: string, pin: string): Promise<[number, string]> {
   const answer = await (await api.visitor()).post('/api/session/card', { code, pin });
   const { reason, type } = answer.body as Problem;
-  return [answer.status, reason ?? type ?? ''];
+  return [answer.status, reason ?? type];
 }
 
 async function holder(personId = elder.personId): Promise<CardHolder | undefined> {

@@ -128,5 +128,5 @@ async function holderOf(manager: EntityManager, card: SignInCardEntity): Promise
 function settled<T>(outcome: T | Exclude<PinTry, 'right' | 'wrong'>): T {
   if (outcome === 'locked') throw new AppError('too-many-attempts', { reason: 'card-locked' });
   if (outcome === 'void') throw new AppError('code-not-valid');
-  return outcome as T;
+  return outcome;
 }

@@ -98,7 +98,10 @@ export class CardsService {
     });
     // The living one counts; without one, the latest.
     const latest = new Map<string, SignInCardEntity>();
-    for (const row of rows) if (latest.get(row.personId)?.liveFor == null) latest.set(row.personId, row);
+    for (const row of rows) {
+      const before = latest.get(row.personId);
+      if (before === undefined || before.liveFor === null) latest.set(row.personId, row);
+    }
     const names = await personNames(
       manager,
       rows.map(({ madeBy }) => madeBy),

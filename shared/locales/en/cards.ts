@@ -69,13 +69,4 @@ export const texts = {
     typed_one: '{{count}} number typed',
     typed_other: '{{count}} numbers typed',
   },
-  here: {
-    label: 'Signed in by card',
-    who: '{{name}}, by card',
-    leave: 'Leave',
-    unsentTitle: 'A recording is not sent yet',
-    unsent: 'If you leave now, what was recorded here and not sent is gone.',
-    stay: 'Stay here',
-    leaveAll: 'Leave and forget it',
-  },
 } as const;

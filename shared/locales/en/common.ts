@@ -153,4 +153,13 @@ export const texts = {
     hint: 'It may have been taken out, or it belongs to another village.',
     toToday: 'Go to Today',
   },
+  byCard: {
+    label: 'Signed in by card',
+    who: '{{name}}, by card',
+    leave: 'Leave',
+    unsentTitle: 'A recording is not sent yet',
+    unsent: 'If you leave now, what was recorded here and not sent is gone.',
+    stay: 'Stay here',
+    leaveAll: 'Leave and forget it',
+  },
 } as const;

@@ -8,6 +8,7 @@ export const texts = {
     groups: 'Groups',
     asking: 'To ask',
     consents: 'Consents',
+    cards: 'Cards',
     settings: 'Settings',
     records: 'Records',
   },

@@ -13,6 +13,8 @@ export const texts = {
     haveCode: 'I have a code',
     haveCodeHint: 'A steward gave you a code of letters and numbers: start here.',
     needed: 'Sign in to go on. You come back to the page you wanted.',
+    haveCard: 'I have a card',
+    haveCardHint: 'A printed card with squares and letters: sign in with it and your PIN.',
     forgotten: 'I have forgotten my password',
   },
   welcome: {

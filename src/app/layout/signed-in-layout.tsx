@@ -11,12 +11,13 @@ import { Board } from '#src/ui/surfaces.js';
 import { EmptyState } from '#src/ui/waiting.js';
 import type { RouteHandle } from '../router.js';
 import { Frame } from './frame.js';
+import { CardBar } from './card-bar.js';
 import { Rail } from './rail.js';
 import { useForgetWithdrawn } from './use-forget-withdrawn.js';
 
 /** Asks a visitor to sign in first; brings everybody else to their screen, inside the rail. */
 export function SignedInLayout() {
-  const { person } = useSession();
+  const { person, card } = useSession();
   const location = useLocation();
   const matches = useMatches();
   const { t } = useTranslation('common');
@@ -44,6 +45,7 @@ export function SignedInLayout() {
         }
       >
         <Frame rail={hasRail ? <Rail /> : null}>
+          {card !== null && <CardBar />}
           <Outlet />
         </Frame>
       </MastEnd>

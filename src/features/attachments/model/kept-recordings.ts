@@ -96,6 +96,16 @@ export async function keptRecordings(personId: string, subject: AttachmentSubjec
     .sort((a, b) => a.beganAt.localeCompare(b.beganAt));
 }
 
+export async function hasKeptRecordings(personId: string): Promise<boolean> {
+  return (await (await database()).countFromIndex('recording', 'person', personId)) > 0;
+}
+
+/** Everything of a person: they leave a device that is not theirs. */
+export async function dropEverythingOf(personId: string): Promise<void> {
+  const all = await (await database()).getAllFromIndex('recording', 'person', personId);
+  for (const { clientId } of all) await dropRecording(clientId);
+}
+
 /** Takes away one part: what was said is said anew. */
 export async function dropPart(clientId: string, part: number): Promise<void> {
   await (

@@ -26,7 +26,7 @@ interface AccountPageProps {
 /** The person and their device: village on screen, look, password, sign out. */
 export function AccountPage({ letters, hidden }: AccountPageProps) {
   const { t } = useTranslation(['session', 'common']);
-  const { person } = useSession();
+  const { person, card } = useSession();
   const words = useProblemWords();
   const signOut = useSignOut();
   usePageTitle(t('account.title'));
@@ -43,10 +43,14 @@ export function AccountPage({ letters, hidden }: AccountPageProps) {
           </Board>
         </div>
         <div className="grid gap-4">
-          <Board title={t('account.changePassword')}>
-            <ChangePasswordForm />
-          </Board>
-          <DevicesBoard />
+          {card === null && (
+            <>
+              <Board title={t('account.changePassword')}>
+                <ChangePasswordForm />
+              </Board>
+              <DevicesBoard />
+            </>
+          )}
           {signOut.error !== null && <TroubleNote sentence={words.problem(signOut.error)} />}
           <div>
             <Button

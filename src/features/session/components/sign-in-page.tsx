@@ -72,6 +72,10 @@ export function SignInPage() {
         </form>
       </Board>
       <div>
+        <Link className="link-line" to={paths.card()}>
+          {t('signIn.haveCard')}
+        </Link>
+        <p className="mb-3 text-small text-umber-soft">{t('signIn.haveCardHint')}</p>
         <Link className="link-line" to={paths.welcome()}>
           {t('signIn.haveCode')}
         </Link>

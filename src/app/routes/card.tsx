@@ -1,0 +1,1 @@
+export { CardPage as Component } from '#src/features/cards/components/card-page.js';
