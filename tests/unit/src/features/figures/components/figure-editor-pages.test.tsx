@@ -4,6 +4,7 @@ import { readChart } from '#server/features/figures/chart.service.js';
 import type { Community } from '#shared/contracts/people.js';
 import { ChangeFigurePage, NewFigurePage } from '#src/features/figures/components/figure-editor-pages.js';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { answerWith, refusal } from '#tests/support/answers.js';
 import { figureInput } from '#tests/support/figure-api.js';
 import { OFFICER, renderOnBoard } from '#tests/support/on-board.js';
@@ -20,6 +21,9 @@ const community: Community = {
 };
 const SAVED = {
   ...figureInput(),
+  sharing: PLAIN_DETAILS,
+  storyLevel: 'village',
+  storyShown: true,
   id: '0190a3a0-0000-7000-8000-0000000000f1',
   communityId,
   markerKey: 'f-0190a3a0-0000-7000-8000-0000000000f1',
@@ -62,6 +66,8 @@ describe('a new figure', () => {
       memberHrs: [1903, 1948],
       indicatorHr: 1903,
       sharingLevel: 'village',
+      sharing: PLAIN_DETAILS,
+      storyLevel: 'village',
     });
   });
 

@@ -77,6 +77,7 @@ const answers = {
       },
     ]),
     progress: [],
+    outcomes: [],
   }),
 };
 
