@@ -10,9 +10,11 @@ import { DatabaseUnfitError, migrate } from './db/migrate.js';
 import { sweepOrphans } from './features/attachments/attachment-sweep.service.js';
 import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
 import { removeOldLetters } from './features/letters/letter-rounds.service.js';
+import { removeOldCodes } from './features/session/old-codes.service.js';
 import { removeExpiredSessions } from './features/session/end-sessions.service.js';
 import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
+import { errorForLog } from './http/error-for-log.js';
 import { openServer } from './http/timeouts.js';
 import type { DevInbox } from './mail/inbox.js';
 import { createSmtpMailer } from './mail/smtp-mailer.js';
@@ -64,7 +66,7 @@ async function main(): Promise<void> {
     tidyDaily(dataSource, clock, log);
     if (letters === null) log.info('letters by e-mail are off: SMTP_URL is not set');
     letters?.start(LETTER_ROUND_MS, (error) => {
-      log.warn({ err: error }, 'letters wait for the next round');
+      log.warn({ err: errorForLog(error) }, 'letters wait for the next round');
     });
     closeOnSignal(server, log, async () => {
       await letters?.close();
@@ -131,8 +133,9 @@ function tidyDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
     Promise.all([
       removeExpiredSessions(dataSource.manager, clock.now()),
       removeOldLetters(dataSource.manager, clock.now()),
+      removeOldCodes(dataSource.manager, clock.now()),
     ]).catch((error: unknown) => {
-      log.warn({ err: error }, 'old sessions and letters stay for another day');
+      log.warn({ err: errorForLog(error) }, 'old sessions, letters and codes stay for another day');
     });
   };
   tidy();

@@ -2,6 +2,7 @@ import { PROBLEM_TYPES, problemTypeUri, type Problem, type ProblemSlug } from '#
 import type { ErrorRequestHandler, RequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { AppError } from './app-error.js';
+import { errorForLog } from './error-for-log.js';
 
 /** Anything that no route answered. */
 export const nothingHere: RequestHandler = () => {
@@ -16,7 +17,8 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
       return;
     }
     const refusal = asAppError(error);
-    if (refusal.status >= 500) log.error({ err: error, requestId: request.id }, 'request failed');
+    if (refusal.status >= 500)
+      log.error({ err: errorForLog(error), requestId: request.id }, 'request failed');
     response.status(refusal.status).type('application/problem+json').json(problemOf(refusal, request.id));
   };
 }

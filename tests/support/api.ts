@@ -1,7 +1,7 @@
 import { mkdtempSync, rmSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
-import { pino } from 'pino';
+import { pino, type Logger } from 'pino';
 import request from 'supertest';
 import type { Response, Test } from 'supertest';
 import type { DataSource } from 'typeorm';
@@ -59,7 +59,8 @@ export interface Client {
 export async function openTestApi({
   mailer = null,
   scan = null,
-}: { mailer?: Mailer | null; scan?: FileScan | null } = {}): Promise<TestApi> {
+  log = pino({ level: 'silent' }),
+}: { mailer?: Mailer | null; scan?: FileScan | null; log?: Logger } = {}): Promise<TestApi> {
   const dataSource = await openTestDatabase();
   let now = TEST_NOW;
   const clock = {
@@ -86,7 +87,7 @@ export async function openTestApi({
       scan,
       clock,
       config,
-      log: pino({ level: 'silent' }),
+      log,
       productVersion: 'test',
       clientDir: null,
     });

@@ -1,6 +1,6 @@
 import type { AuditAction } from '#shared/contracts/audit.js';
 import { randomUUID } from 'node:crypto';
-import type { EntityManager } from 'typeorm';
+import type { EntityManager, QueryDeepPartialEntity } from 'typeorm';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
 
 export interface AuditRecord {
@@ -17,5 +17,11 @@ export interface AuditRecord {
 /** Writes down what happened, in the same transaction as the change itself. */
 export async function recordAudit(manager: EntityManager, record: AuditRecord): Promise<void> {
   const { details = {}, ...rest } = record;
-  await manager.save(AuditEventEntity, { id: randomUUID(), ...rest, details }, { reload: false });
+  await manager
+    .createQueryBuilder()
+    .insert()
+    .into(AuditEventEntity)
+    .values({ id: randomUUID(), ...rest, details } as QueryDeepPartialEntity<AuditEventEntity>)
+    .updateEntity(false)
+    .execute();
 }

@@ -226,4 +226,28 @@ describe('whatever answers', () => {
       expect(answer.headers['x-powered-by']).toBeUndefined();
     },
   );
+
+  it('lets pages fetch from here alone: no directive names another origin', async () => {
+    const answer = await officer.get('/api/session');
+    const policy = String(answer.headers['content-security-policy']);
+    const sources = policy.split(';').flatMap((directive) => directive.trim().split(/\s+/u).slice(1));
+    const ours = ["'self'", "'none'", "'unsafe-inline'", 'data:', 'blob:', 'https:'];
+    expect(sources.filter((source) => !ours.includes(source))).toEqual([]);
+    const carries = (directive: string) =>
+      policy.split(';').find((part) => part.trim().startsWith(directive)) ?? '';
+    for (const name of [
+      'script-src',
+      'default-src',
+      'frame-ancestors',
+      'form-action',
+      'object-src',
+      'base-uri',
+    ]) {
+      expect([name, /'(self|none)'/u.test(carries(name)), /https:|unsafe/u.test(carries(name))]).toEqual([
+        name,
+        true,
+        false,
+      ]);
+    }
+  });
 });

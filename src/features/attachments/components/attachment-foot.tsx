@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Attachment } from '#shared/contracts/attachments.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Dialog } from '#src/ui/dialog.js';
@@ -17,7 +18,7 @@ export function AttachmentFoot({ attachment }: { attachment: Attachment }) {
   const words = useProblemWords();
   const remove = useRemoveAttachment();
   const [isAsking, setIsAsking] = useState(false);
-  const { id, addedBy, addedAt, sharingLevel, may } = attachment;
+  const { communityId, title, speaker, id, addedBy, addedAt, sharingLevel, may } = attachment;
   const when = { name: addedBy, moment: moment(addedAt) };
   const removeIt = async () => {
     try {
@@ -34,6 +35,12 @@ export function AttachmentFoot({ attachment }: { attachment: Attachment }) {
         {addedBy === '' ? t('card.whenOnly', when) : t('card.when', when)} ·{' '}
         {t(`sharing:level.${sharingLevel}.name`)}
       </p>
+      <TakeBackLink
+        communityId={communityId}
+        itemType="attachment"
+        itemId={id}
+        about={title === '' ? speaker : title}
+      />
       {may.remove && (
         <Button
           look="quiet"
