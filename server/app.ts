@@ -38,6 +38,8 @@ import { figuresRoutes } from './features/figures/figures.routes.js';
 import { FiguresService } from './features/figures/figures.service.js';
 import { healthRoutes } from './features/health/health.routes.js';
 import { HealthService } from './features/health/health.service.js';
+import { notesRoutes } from './features/notes/notes.routes.js';
+import { NotesService } from './features/notes/notes.service.js';
 import { moonsRoutes } from './features/moons/moons.routes.js';
 import { MoonsService } from './features/moons/moons.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
@@ -205,6 +207,7 @@ export function createApp(options: AppOptions): App {
   const publishing = new PublishingService(dataSource, clock, contents, versions);
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
+  notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const answers = new AnswersService(dataSource, clock);

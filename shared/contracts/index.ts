@@ -12,6 +12,7 @@ import { healthEndpoints } from './health.js';
 import { lookEndpoints } from './look.js';
 import { moonsEndpoints } from './moons.js';
 import { lettersEndpoints } from './letters.js';
+import { notesEndpoints } from './notes.js';
 import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
 import { reviewsEndpoints } from './reviews.js';
@@ -47,6 +48,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   attachmentsEndpoints,
   sheetsEndpoints,
   sharingEndpoints,
+  notesEndpoints,
   withdrawalsEndpoints,
   consentsEndpoints,
   auditEndpoints,

@@ -13,6 +13,9 @@ export const TRACES = ['blank', 'none'] as const;
 /** How the giver is named beside it. */
 export const NAMINGS = ['named', 'role', 'not-named'] as const;
 
+/** Stands in place of a giver who wishes to be named by their role. */
+export const GIVER_BY_ROLE = '@role';
+
 /** Everything that has a level of its own. */
 export const SHARED_ITEM_TYPES = ['entry', 'figure', 'story', 'note', 'attachment', 'variant'] as const;
 export type SharedItemType = (typeof SHARED_ITEM_TYPES)[number];

@@ -12,6 +12,7 @@ import { texts as finder } from './en/finder.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
 import { texts as look } from './en/look.js';
+import { texts as notes } from './en/notes.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
@@ -38,6 +39,7 @@ export const en = {
   files,
   letters,
   look,
+  notes,
   people,
   places,
   stars,

@@ -35,7 +35,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.look, texts: ['look', 'sky'], load: () => import('./routes/look.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
   { path: PATTERNS.moons, texts: ['moons', 'sky'], load: () => import('./routes/moons.js') },
-  { path: PATTERNS.star, texts: ['stars', 'sky'], load: () => import('./routes/star.js') },
+  { path: PATTERNS.star, texts: ['stars', 'sky', 'notes'], load: () => import('./routes/star.js') },
   { path: PATTERNS.drift, texts: ['drift', 'sky'], load: () => import('./routes/drift.js') },
   { path: PATTERNS.finder, texts: ['finder', 'sky'], load: () => import('./routes/finder.js') },
   { path: PATTERNS.air, texts: ['air', 'stars', 'sky'], load: () => import('./routes/air.js') },
@@ -55,7 +55,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
   {
     path: PATTERNS.figure,
-    texts: ['figures', 'stars', 'sky', 'attachments', 'sharing', 'consents'],
+    texts: ['figures', 'stars', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
     load: () => import('./routes/figure.js'),
   },
   { path: PATTERNS.changeFigure, texts: ['figures'], load: () => import('./routes/figure-change.js') },
@@ -83,7 +83,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'sky', 'attachments', 'sharing', 'consents'],
+    texts: ['calendars', 'versions', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
     load: () => import('./routes/calendar.js'),
   },
   {
@@ -93,7 +93,7 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.version,
-    texts: ['versions', 'calendars', 'reviews', 'places', 'sky'],
+    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing'],
     load: () => import('./routes/version.js'),
   },
   {
@@ -104,7 +104,7 @@ export const villageRoutes: readonly AppRoute[] = [
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,
-    texts: ['reviews', 'sky', 'attachments', 'sharing', 'consents'],
+    texts: ['reviews', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
     load: () => import('./routes/review.js'),
     rail: false,
   },

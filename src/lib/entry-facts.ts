@@ -2,6 +2,7 @@ import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import { useDateWords } from './date-words.js';
+import { useGiverWords } from './giver-words.js';
 import { useSharingWords } from './sharing-words.js';
 import { useEntryWords, type NamesByKey } from './entry-words.js';
 import { useMarkerDayWords } from './marker-day-words.js';
@@ -28,6 +29,7 @@ export interface EntryFacts {
 export function useEntryFacts(): EntryFacts {
   const { t } = useTranslation('calendars');
   const sharing = useSharingWords();
+  const giverWords = useGiverWords();
   const dateWords = useDateWords();
   const entryWords = useEntryWords();
   const markerDays = useMarkerDayWords();
@@ -69,7 +71,7 @@ export function useEntryFacts(): EntryFacts {
         signs: told([{ key: 'signs', label: t('form.otherSigns'), value: content.otherSigns }]),
         late: told([{ key: 'late', label: t('form.ifLate'), value: content.ifLate }]),
         whose: told([
-          { key: 'giver', label: t('form.giver'), value: content.giver },
+          { key: 'giver', label: t('form.giver'), value: giverWords(content.giver) },
           {
             key: 'level',
             label: t('form.sharingLevel'),
@@ -83,5 +85,5 @@ export function useEntryFacts(): EntryFacts {
         ]),
       }),
     };
-  }, [t, sharing, dateWords, entryWords, markerDays]);
+  }, [t, sharing, giverWords, dateWords, entryWords, markerDays]);
 }

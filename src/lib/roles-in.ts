@@ -5,6 +5,8 @@ import { useCommunityChoice } from './community.js';
 export interface RolesIn {
   /** Writes drafts, submits, publishes. */
   isOfficer: boolean;
+  /** Writes entries that their people keep, and reviews all others. */
+  isElder: boolean;
   /** Officers, elders and stewards see drafts and answers; everybody else what was published. */
   seesDrafts: boolean;
 }
@@ -15,6 +17,6 @@ export function useRolesIn(communityId: string): RolesIn {
   return useMemo(() => {
     const roles = memberships.find((each) => each.communityId === communityId)?.roles ?? [];
     const is = (...any: Role[]) => any.some((role) => roles.includes(role));
-    return { isOfficer: is('officer'), seesDrafts: is('officer', 'elder', 'steward') };
+    return { isOfficer: is('officer'), isElder: is('elder'), seesDrafts: is('officer', 'elder', 'steward') };
   }, [memberships, communityId]);
 }

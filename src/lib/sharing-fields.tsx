@@ -27,13 +27,22 @@ export interface SharingFieldsProps {
   problem: (field: 'level' | 'groupId' | 'successorId' | 'tellingSeason') => string | undefined;
   label?: string | undefined;
   hint?: string | undefined;
+  /** Which levels can be chosen; all of them where nothing is said. */
+  levels?: readonly SharingLevel[] | undefined;
 }
 
 const PLAIN_YEAR = 2027;
 const A_MONTH = { from: { month: 8, day: 1 }, to: { month: 8, day: 31 } };
 
 /** Who may see a thing; what it takes further is asked only where the level needs it. */
-export function SharingFields({ value, onChange, problem, label, hint }: SharingFieldsProps) {
+export function SharingFields({
+  value,
+  onChange,
+  problem,
+  label,
+  hint,
+  levels = SHARING_LEVELS,
+}: SharingFieldsProps) {
   const { t } = useTranslation('sharing');
   const { level, details } = value;
   const change = (changed: Partial<SharingDetails>) => {
@@ -54,7 +63,7 @@ export function SharingFields({ value, onChange, problem, label, hint }: Sharing
             details: { ...details, groupId: next === 'group' ? details.groupId : null },
           });
         }}
-        options={SHARING_LEVELS.map((one) => ({
+        options={levels.map((one) => ({
           value: one,
           label: t(`level.${one}.name`),
           note: t(`level.${one}.note`),

@@ -137,6 +137,7 @@ const SHOWING = new Set([
   'listAnswers',
   'readConsent',
   'listAttachments',
+  'listNotes',
 ]);
 
 function plantedIn(where: string): Planted {

@@ -5,6 +5,7 @@ import { WithdrawalEntity } from '#server/db/entities/withdrawal.entity.js';
 import { VillageGroupEntity } from '#server/db/entities/village-group.entity.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { addVariant, variantInput } from '#tests/support/variant-api.js';
+import { addNote, noteInput } from '#tests/support/notes-api.js';
 import { addGroup } from '#tests/support/sharing-api.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
@@ -46,6 +47,8 @@ interface Village {
   attachmentId: string;
   groupId: string;
   variantId: string;
+  /** A note of somebody who calls nothing here. */
+  noteId: string;
   withdrawalId: string;
   /** One about each who calls, for it is theirs to read; visitors ask for the officer's. */
   consentIds: Readonly<Record<Role, string>>;
@@ -156,6 +159,7 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     part: '1',
     groupId: village.groupId,
     variantId: village.variantId,
+    noteId: village.noteId,
     withdrawalId: village.withdrawalId,
     consentId: village.consentIds[role ?? 'officer'],
     itemType: 'entry',
@@ -245,6 +249,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     updateEntry: () => ({ content: entryInput(), ...stale }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
+    addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),
+    answerNote: () => ({ text: 'So it is told here, too' }),
     addGroup: () => ({ name: `Menders ${role ?? ''}`, memberIds: [village.elderId] }),
     updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
     // Nobody of these gave it or is asked for it: the thing stays.
@@ -289,6 +295,7 @@ async function furnishOwn(): Promise<Village> {
     attachmentId: (await addPicture(village.elder, figureId)).id,
     withdrawalId: await aWithdrawal(village.officer.communityId),
     variantId,
+    noteId: await aNote(village.officer, figureId),
     groupId: (await addGroup(village.steward, 'Weavers', [village.elder])).id,
     consentIds: await consentsOf(village.officer, entry.id, clients),
     elderId: village.elder.personId,
@@ -315,12 +322,17 @@ async function furnishOther(): Promise<Village> {
     attachmentId: (await addPicture(officer, figureId)).id,
     withdrawalId: await aWithdrawal(home.community.id),
     variantId,
+    noteId: await aNote(officer, figureId),
     groupId: await firstGroup(home.community.id),
     consentIds: await consentsOf(officer, entry.id, {}),
     elderId: home.community.signOffRule.mustSign[0] ?? '',
     publishedNumber: number,
     reviewedNumber: number,
   };
+}
+
+async function aNote(officer: Client, figureId: string): Promise<string> {
+  return (await addNote(officer, { subjectType: 'figure', subjectId: figureId })).id;
 }
 
 /** Of something that is on no sheet. */

@@ -3,7 +3,7 @@ import type { AuditEvent } from '#shared/contracts/audit.js';
 import type { Calendar, Entry, EntryList } from '#shared/contracts/calendars.js';
 import type { CommunityPerson } from '#shared/contracts/people.js';
 import type { ElderProgress } from '#shared/contracts/reviews.js';
-import type { Group, ItemSharing, SharingInput } from '#shared/contracts/sharing.js';
+import { GIVER_BY_ROLE, type Group, type ItemSharing, type SharingInput } from '#shared/contracts/sharing.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
@@ -239,6 +239,43 @@ describe('changing who may see a thing', () => {
   function change(client: Client, sharing: Partial<SharingInput>, version = 1) {
     return client.put(path, { sharing: { level: 'village', ...details(), ...sharing }, version });
   }
+});
+
+describe('how the giver is named', () => {
+  it('is as they wish, in drafts, versions and beside the level, for everybody but themselves', async () => {
+    const { elder, elder2, officer } = village;
+    const changes = { giver: 'Elder A-1', giverId: elder.personId, sharingLevel: 'village' } as const;
+    const byRole = await addEntry(officer, calendar.id, { ...changes, sharing: details({ naming: 'role' }) });
+    await addEntry(officer, calendar.id, { ...changes, sharing: details({ naming: 'not-named' }) });
+    const giversFor = async (client: Client) => [
+      (await entriesOf(client, calendar.id)).map(({ content }) => content.giver),
+    ];
+    expect(await giversFor(officer)).toEqual([[GIVER_BY_ROLE, '']]);
+    expect(await giversFor(elder)).toEqual([['Elder A-1', 'Elder A-1']]);
+    const version = await submit(officer, calendar.id);
+    const read = await readVersion(elder2, version);
+    expect(read.entries.map(({ content }) => [content.giver, content.giverId])).toEqual([
+      [GIVER_BY_ROLE, null],
+      ['', null],
+    ]);
+    const beside = await officer.get(sharingPath(officer, 'entry', byRole.id)).expect(200);
+    expect(beside.body).toMatchObject({ giverId: null, giverName: '' });
+  });
+
+  it('is not lost when somebody writes on what shows them no name', async () => {
+    const { elder, officer } = village;
+    const { id } = await addEntry(officer, calendar.id, {
+      ...{ giver: 'Elder A-1', giverId: elder.personId, sharingLevel: 'village' },
+      sharing: details({ naming: 'role' }),
+    });
+    const [seen] = await entriesOf(officer, calendar.id);
+    const content = { ...seen?.content, notes: 'After the first rain' };
+    await officer.put(`/api/calendars/${calendar.id}/entries/${id}`, { content, version: 1 }).expect(200);
+    const [own] = await entriesOf(elder, calendar.id);
+    expect(own?.content).toMatchObject({
+      ...{ giver: 'Elder A-1', giverId: elder.personId, notes: 'After the first rain' },
+    });
+  });
 });
 
 describe('groups', () => {

@@ -21,6 +21,7 @@ import { variantInput } from './variant-api.js';
 import { addConsent } from './consent-api.js';
 import { addRecording } from './attachment-api.js';
 import { addFigure, figureInput } from './figure-api.js';
+import { addNote } from './notes-api.js';
 import { addGroup, details } from './sharing-api.js';
 
 /** A word that stands in one thing alone, and who may read it on the test's day. */
@@ -209,6 +210,17 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       }),
     );
   }
+  for (const [index, entry] of [open, ...kept].entries()) {
+    const { sharingLevel } = entry.content;
+    const seers = entry === open ? VILLAGE : ['giver', ...readers(entry.content)];
+    await addNote(elder, { subjectId: entry.id, text: plant(`note on ${sharingLevel} ${index}`, seers) });
+  }
+  const forElders = plant('note for the elders', ['giver', 'heir', 'weaver']);
+  await addNote(elder, { subjectId: open.id, text: forElders, level: 'elders' });
+  await addNote(elder, {
+    ...{ subjectType: 'figure', subjectId: figures.elders.id },
+    text: plant('note on the elders figure', ['giver', 'heir', 'weaver']),
+  });
   const numbers = [String(published.number), String(reviewed.number)];
   const [sealed] = kept.slice(2);
   return {
@@ -235,6 +247,7 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       groupId: [group.id],
       variantId: variants.map(({ variantId }) => variantId),
       consentId: consents.map(({ id }) => id),
+      noteId: [randomUUID()],
       withdrawalId: [randomUUID()],
       attachmentId: recordings.map(({ id }) => id),
       part: ['0', '1'],
@@ -256,6 +269,10 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       readSheet: ['?layout=month-cards', '?layout=year-board'],
       printSheet: ['?layout=month-cards'],
       listAuditEvents: ['?limit=200'],
+      listNotes: [open, ...kept, ...Object.values(figures)].map(
+        ({ id }) =>
+          `?subjectType=${Object.values(figures).some((one) => one.id === id) ? 'figure' : 'entry'}&subjectId=${id}`,
+      ),
       listAttachments: [{ id: openEntry?.entryId ?? '' }, ...kept, ...Object.values(figures)].map(
         ({ id }) =>
           `?subjectType=${Object.values(figures).some((figure) => figure.id === id) ? 'figure' : 'entry'}&subjectId=${id}`,
@@ -267,6 +284,12 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
 /** The words that somebody gives with their yes. */
 function agreed(word: string): Partial<ConsentContent> {
   return { giverName: word, spokeFor: word, conditions: word, benefits: word, explainedBy: word };
+}
+
+/** Who reads a published entry besides its giver. */
+function readers(content: EntryInput): string[] {
+  const group = content.sharingLevel === 'group' ? ['observer of the group'] : [];
+  return [...answerers(content), ...group];
 }
 
 /** Who reads what an elder said about an entry: its own people who see reviews. */

@@ -23,6 +23,8 @@ import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
+import { NoteAnswerEntity } from './note-answer.entity.js';
+import { NoteEntity } from './note.entity.js';
 import { EntryVariantEntity } from './entry-variant.entity.js';
 import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
@@ -56,6 +58,8 @@ export const ENTITIES = [
   ItemSharingEntity,
   KeptReadEntity,
   WithdrawalEntity,
+  NoteEntity,
+  NoteAnswerEntity,
   EntryVariantEntity,
   VersionVariantEntity,
   ConsentEntity,

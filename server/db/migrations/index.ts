@@ -6,6 +6,7 @@ import { RainMonths1797000000000 } from './1797000000000-rain-months.js';
 import { Attachments1797200000000 } from './1797200000000-attachments.js';
 import { AttachmentSharing1797300000000 } from './1797300000000-attachment-sharing.js';
 import { Consents1797400000000 } from './1797400000000-consents.js';
+import { Notes1797600000000 } from './1797600000000-notes.js';
 import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
 import { Cards1797900000000 } from './1797900000000-cards.js';
 import { Variants1798000000000 } from './1798000000000-variants.js';
@@ -20,6 +21,7 @@ export const MIGRATIONS = [
   Attachments1797200000000,
   AttachmentSharing1797300000000,
   Consents1797400000000,
+  Notes1797600000000,
   Withdrawals1797800000000,
   Cards1797900000000,
   Variants1798000000000,

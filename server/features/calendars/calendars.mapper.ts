@@ -1,4 +1,4 @@
-import type { Calendar, Entry, EntryDates } from '#shared/contracts/calendars.js';
+import type { Calendar, Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { PlaceSnapshot } from '#shared/contracts/stars.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import type { EntryEntity } from '../../db/entities/entry.entity.js';
@@ -33,6 +33,8 @@ export function toCalendar({ row, published, entryCount, showsDraft }: CalendarF
 
 export interface EntryFacts {
   row: EntryEntity;
+  /** With its giver named as they wish. */
+  content: EntryInput;
   dates: EntryDates;
   updatedByName: string;
   /** Among those that the person sees, so that no gap shows what they do not see. */
@@ -40,13 +42,13 @@ export interface EntryFacts {
   mine: boolean;
 }
 
-export function toEntry({ row, dates, updatedByName, position, mine }: EntryFacts): Entry {
+export function toEntry({ row, content, dates, updatedByName, position, mine }: EntryFacts): Entry {
   return {
     id: row.id,
     calendarId: row.calendarId,
     position,
     version: row.version,
-    content: row.content,
+    content,
     dates,
     updatedBy: updatedByName,
     updatedAt: row.updatedAt.toISOString(),

@@ -18,6 +18,7 @@ import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
+import { withKeptGiver, withNaming } from '../../policy/giver-naming.js';
 import { isKept } from '../../policy/policy.js';
 import { copySharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
@@ -66,18 +67,21 @@ export class EntriesService {
       const row = await this.writable(manager, actor, calendarId, entryId);
       if (row.version !== input.version)
         throw stale(await this.one(manager, actor, calendar, entryId), input);
-      const fields = changedFields(row.content, input.content);
+      const viewer = await this.viewer(manager, actor);
+      const shared = (await sharedById(manager, 'entry', [entryId])).get(entryId);
+      const content = withKeptGiver(viewer, shared, row.content, input.content);
+      const fields = changedFields(row.content, content);
       if (fields.includes('lead')) {
-        await expectKnownMarker(manager, await this.viewer(manager, actor), input.content, 'content.lead');
+        await expectKnownMarker(manager, viewer, content, 'content.lead');
       }
       if (fields.length > 0) {
         // Recorded first: who may see it afterwards is decided by what it says afterwards.
         await this.record(manager, actor, calendarId, 'entry-changed', entryId, { fields });
-        await shareChangedEntry(manager, actor, entryId, input.content);
+        await shareChangedEntry(manager, actor, entryId, content);
         await manager.update(
           EntryEntity,
           { id: entryId, version: input.version },
-          { content: input.content, updatedBy: actor.person.id, updatedAt: this.clock.now() },
+          { content, updatedBy: actor.person.id, updatedAt: this.clock.now() },
         );
       }
       return this.one(manager, actor, calendar, entryId);
@@ -228,8 +232,10 @@ export class EntriesService {
         ? inOrder(new Set([...dates.warnings, 'windows-overlap' as const]))
         : dates.warnings;
       const updatedByName = names.get(row.updatedBy) ?? '';
-      const mine = mayWrite(viewer, sight.sharedOf(row.id));
-      return toEntry({ row, dates: { ...dates, warnings }, updatedByName, position, mine });
+      const shared = sight.sharedOf(row.id);
+      const mine = mayWrite(viewer, shared);
+      const content = withNaming(viewer, shared, row.content);
+      return toEntry({ row, content, dates: { ...dates, warnings }, updatedByName, position, mine });
     });
     const keptCount = entries.filter(({ row }) => sight.appearance(thingOf(row)) === 'blank').length;
     return { items, nextCursor: null, keptCount };

@@ -9,6 +9,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { hidesGiver } from '../../policy/giver-naming.js';
 import { maySee } from '../../policy/policy.js';
 import { lockSharing } from '../../policy/sharing.repository.js';
 import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
@@ -180,7 +181,8 @@ export class ItemSharingService {
     const names = await personNames(manager, [giverId, details.successorId, asked?.askedBy ?? null]);
     const groupId = details.groupId ?? asked?.details.groupId ?? null;
     const group = groupId === null ? null : await manager.findOneBy(VillageGroupEntity, { id: groupId });
-    const sees = maySee(await viewerOf(manager, actor, this.clock.now()), row);
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const sees = maySee(viewer, row);
     const agreeWider =
       asked !== null &&
       ((!asked.giverAgreed && (await this.standsForGiver(manager, actor, row))) ||
@@ -191,6 +193,7 @@ export class ItemSharingService {
       names,
       groupName: group?.name ?? null,
       may: { tighten, askWider: tighten, agreeWider },
+      namesGiver: !hidesGiver(viewer, row),
     });
   }
 

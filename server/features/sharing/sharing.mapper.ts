@@ -27,17 +27,19 @@ export interface ItemSharingFacts {
   names: ReadonlyMap<string, string>;
   groupName: string | null;
   may: ItemSharing['may'];
+  /** False where the giver wishes not to be named to this person. */
+  namesGiver: boolean;
 }
 
-export function toItemSharing({ row, names, groupName, may }: ItemSharingFacts): ItemSharing {
+export function toItemSharing({ row, names, groupName, may, namesGiver }: ItemSharingFacts): ItemSharing {
   const nameOf = (id: string | null) => (id === null ? '' : (names.get(id) ?? ''));
   return {
     itemType: row.itemType,
     itemId: row.itemId,
     sharing: { level: row.level, ...row.details },
     groupName,
-    giverId: row.giverId,
-    giverName: nameOf(row.giverId),
+    giverId: namesGiver ? row.giverId : null,
+    giverName: namesGiver ? nameOf(row.giverId) : '',
     successorName: nameOf(row.details.successorId),
     asked: row.asked && {
       sharing: { level: row.asked.level, ...row.asked.details },

@@ -5,6 +5,7 @@ import type { EntityManager } from 'typeorm';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
+import { withNaming } from '../../policy/giver-naming.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { markerKeyOfLead, markerKeysOf, withUsedFigures } from '../calendars/sky-dates.service.js';
 
@@ -31,6 +32,7 @@ export async function seenOfVersion(
     header,
     seen.filter(({ entryId }) => !fallen.has(entryId)),
     sight,
+    viewer,
   );
 }
 
@@ -42,7 +44,7 @@ export async function seenOfDraft(
   entries: readonly VersionEntryBody[],
 ): Promise<Seen<VersionEntryBody>> {
   const seen = await withSeenVariants(manager, viewer, entries);
-  return cutDown(header, seen, await entrySight(manager, viewer, entries.map(thingOf)));
+  return cutDown(header, seen, await entrySight(manager, viewer, entries.map(thingOf)), viewer);
 }
 
 export function thingOf({ entryId, content }: Pick<VersionEntryBody, 'entryId' | 'content'>): SeenThing {
@@ -118,13 +120,18 @@ function cutDown<B extends VersionEntryBody>(
   header: VersionHeader,
   entries: readonly B[],
   sight: EntrySight,
+  viewer: Viewer,
 ): Seen<B> {
   const shown = entries.filter((entry) => sight.appearance(thingOf(entry)) === 'full');
   const cut = cutHeader(header, shown);
   return {
     header: cut.header,
     headerComplete: cut.complete,
-    entries: shown.map((entry, position) => ('position' in entry ? { ...entry, position } : entry)),
+    entries: shown.map((entry, position) => ({
+      ...entry,
+      ...('position' in entry ? { position } : {}),
+      content: withNaming(viewer, sight.sharedOf(entry.entryId), entry.content),
+    })),
     keptCount: entries.filter((entry) => sight.appearance(thingOf(entry)) === 'blank').length,
   };
 }

@@ -13,6 +13,7 @@ import type { AttachmentFilesService } from '../attachments/attachment-files.ser
 import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.service.js';
 import { eraseConsents } from '../consents/consent-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
+import { eraseNote, eraseNotesOf } from '../notes/note-eraser.service.js';
 import {
   eraseFrozenEntry,
   eraseFrozenFigure,
@@ -50,13 +51,24 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       itemType === 'entry' || itemType === 'figure'
         ? attached(await eraseAttachmentsOf(manager, itemType, [itemId]))
         : {},
+    only('note', async (manager, { itemId }) => {
+      await eraseNote(manager, itemId);
+      return {};
+    }),
+    async (manager, { itemType, itemId }) => {
+      if (itemType !== 'entry' && itemType !== 'figure') return {};
+      const noteIds = await eraseNotesOf(manager, itemType, itemId);
+      return { withIt: noteIds.map((id) => ({ itemType: 'note' as const, itemId: id })) };
+    },
     only('figure', async (manager, { communityId, itemId }) => {
       const { markerKey, indicatorHr, entries } = await eraseFigureRow(manager, communityId, itemId);
       await leadByStarInstead(manager, entries, indicatorHr, clock.now());
       const told = await eraseAttachmentsOf(manager, 'marker', [markerKey]);
+      const remarked = await eraseNotesOf(manager, 'marker', markerKey);
       const published = await eraseFrozenFigure(manager, communityId, markerKey);
       const { withIt = [], ...rest } = attached(told);
-      return { ...rest, published, withIt: [...withIt, { itemType: 'story', itemId }] };
+      const notes = remarked.map((id) => ({ itemType: 'note' as const, itemId: id }));
+      return { ...rest, published, withIt: [...withIt, ...notes, { itemType: 'story', itemId }] };
     }),
     only('story', async (manager, { itemId }) => {
       await eraseStory(manager, itemId);

@@ -125,6 +125,7 @@ export const texts = {
     chooseFirstNote: 'Choose first what stays.',
     chooseFirst: 'choose first what stays',
     add: 'Add an entry',
+    addOwn: 'An entry of my own',
     addFirst: 'Add the first entry',
     empty: 'No entries yet',
     emptyHint:
@@ -151,6 +152,7 @@ export const texts = {
     notKept: 'Not saved yet. This device could not keep it: save it before you leave.',
     orphan: 'Somebody took “{{title}}” out while you were writing to it. Your text is still here.',
     orphanSave: 'Put it in as a new entry',
+    readOnlyKeeper: 'You read the village’s entries and write those that you keep.',
     readOnly: 'Only officers write to the draft.',
     stripTrouble: 'The stars’ lanes could not be brought up. Days are shown as they were saved.',
     loadingStars: 'The stars are on their way.',
@@ -275,6 +277,7 @@ export const texts = {
     ifLate: 'What to do if it is late',
     ifLateHint: 'Printed beside the entry: what still goes, what does not, whom to ask.',
     giver: 'Who gave this knowledge',
+    moreOfIt: 'Kind, picture, crop, caution',
     giverHint: 'A name, or how the person wants to be named.',
     agreedToPrint: 'Asked, and agreed to print',
     agreedToPrintHint: 'An entry of belief is never printed without it.',

@@ -133,6 +133,8 @@ export const texts = {
     answersTitle: 'What was said',
     nothingSaid: 'Nobody has asked for a change or left a note.',
     signSteward: 'Sign as the steward',
+    stewardKept:
+      'What people keep to themselves is not yours to read here. You sign that the way was kept: that those who keep it were asked, and that nobody was passed over.',
     stewardHint: 'You sign that the village’s way was kept.',
   },
 } as const;

@@ -38,6 +38,7 @@ export const texts = {
   },
   giver: 'Its giver, if one of the village’s people here',
   giverHint: 'It is theirs to make narrower and to take back.',
+  byRoleOnly: 'Given by an elder of the village who wishes not to be named here. That stays as it is.',
   giverMe: 'Whoever writes it down',
   summary: {
     season: 'told from {{from}} to {{to}}',

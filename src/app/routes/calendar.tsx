@@ -1,4 +1,5 @@
 import { AboutItem } from '#src/app/items/about-item.js';
+import { textsOfEntry } from '#src/app/items/noted-texts.js';
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { TakeBack } from '#src/features/versions/components/take-back.js';
 
@@ -9,8 +10,12 @@ export function Component() {
       lockedAction={({ id, outNumber }, isOfficer) =>
         isOfficer && outNumber !== null ? <TakeBack calendarId={id} number={outNumber} /> : null
       }
-      about={({ communityId, entryId, ...asked }) => (
-        <AboutItem item={{ communityId, itemType: 'entry', itemId: entryId }} {...asked} />
+      about={({ communityId, entryId, content, ...asked }) => (
+        <AboutItem
+          item={{ communityId, itemType: 'entry', itemId: entryId }}
+          texts={textsOfEntry(content)}
+          {...asked}
+        />
       )}
     />
   );

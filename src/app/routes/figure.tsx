@@ -1,5 +1,6 @@
 import { useNavigate } from 'react-router-dom';
 import { AboutItem } from '#src/app/items/about-item.js';
+import { textsOfFigure } from '#src/app/items/noted-texts.js';
 import { FigurePage } from '#src/features/figures/components/figure-page.js';
 import { MarkerDays } from '#src/features/stars/components/marker-days.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
@@ -12,9 +13,10 @@ export function Component() {
   return (
     <FigurePage
       days={(markerKey) => <MarkerDays key={markerKey} markerKey={markerKey} />}
-      about={(itemId) => (
+      about={(figure) => (
         <AboutItem
-          item={{ communityId, itemType: 'figure', itemId }}
+          item={{ communityId, itemType: 'figure', itemId: figure.id }}
+          texts={textsOfFigure(figure)}
           onHidden={() => void navigate(paths.villageFigures())}
         />
       )}

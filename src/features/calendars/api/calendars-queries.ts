@@ -16,7 +16,6 @@ export function calendarsQuery(communityId: string) {
 export function entriesQuery(calendarId: string) {
   return queryOptions({
     queryKey: calendarKeys.entries(calendarId),
-    queryFn: async ({ signal }) =>
-      (await callApi(calendarsEndpoints.listEntries, { params: { calendarId }, signal })).items,
+    queryFn: ({ signal }) => callApi(calendarsEndpoints.listEntries, { params: { calendarId }, signal }),
   });
 }

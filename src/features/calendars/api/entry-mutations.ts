@@ -11,7 +11,10 @@ function useEntriesChanged(calendarId: string) {
   return {
     client,
     show: (change: (entries: readonly Entry[]) => Entry[]) => {
-      client.setQueryData(entriesQuery(calendarId).queryKey, (entries) => entries && change(entries));
+      client.setQueryData(
+        entriesQuery(calendarId).queryKey,
+        (list) => list && { ...list, items: change(list.items) },
+      );
       void lookAgain(client, calendarId);
     },
   };
@@ -90,20 +93,22 @@ export function useReorderEntries(calendarId: string) {
   const { client } = useEntriesChanged(calendarId);
   const { queryKey } = entriesQuery(calendarId);
   return useMutation({
-    mutationFn: async (entryIds: readonly string[]) =>
-      (
-        await callApi(calendarsEndpoints.reorderEntries, {
-          params: { calendarId },
-          body: { entryIds: [...entryIds] },
-        })
-      ).items,
+    mutationFn: (entryIds: readonly string[]) =>
+      callApi(calendarsEndpoints.reorderEntries, {
+        params: { calendarId },
+        body: { entryIds: [...entryIds] },
+      }),
     onMutate: async (entryIds) => {
       await client.cancelQueries({ queryKey });
       const before = client.getQueryData(queryKey);
       const place = new Map(entryIds.map((id, index) => [id, index]));
       client.setQueryData(
         queryKey,
-        (entries) => entries && [...entries].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0)),
+        (list) =>
+          list && {
+            ...list,
+            items: [...list.items].sort((a, b) => (place.get(a.id) ?? 0) - (place.get(b.id) ?? 0)),
+          },
       );
       return before;
     },
@@ -111,8 +116,8 @@ export function useReorderEntries(calendarId: string) {
       client.setQueryData(queryKey, before);
       void lookAgain(client, calendarId);
     },
-    onSuccess: (entries) => {
-      client.setQueryData(queryKey, entries);
+    onSuccess: (list) => {
+      client.setQueryData(queryKey, list);
     },
   });
 }

@@ -12,12 +12,13 @@ import { newEntryPath, type WantedMarker } from '../model/wanted-marker.js';
 interface CalendarCardProps {
   calendar: Calendar;
   isOfficer: boolean;
+  isElder: boolean;
   seesDrafts: boolean;
   wanted: WantedMarker | null;
 }
 
 /** One calendar: what is published, what is out, and the ways on. */
-export function CalendarCard({ calendar, isOfficer, seesDrafts, wanted }: CalendarCardProps) {
+export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted }: CalendarCardProps) {
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
   const { id, year, placeName, published, outNumber, entryCount, updatedAt } = calendar;
@@ -54,6 +55,11 @@ export function CalendarCard({ calendar, isOfficer, seesDrafts, wanted }: Calend
         {seesDrafts && !isChosenFor && (
           <ButtonLink to={paths.calendar(id)} icon={<ChevronRight aria-hidden className="turns" size={20} />}>
             {isOfficer && outNumber === null ? t('list.openDraft') : t('list.readDraft')}
+          </ButtonLink>
+        )}
+        {isElder && !isOfficer && outNumber === null && (
+          <ButtonLink to={paths.calendar(id, { entry: 'new' })} icon={<Plus aria-hidden size={20} />}>
+            {t('editor.addOwn')}
           </ButtonLink>
         )}
         {published !== null && (

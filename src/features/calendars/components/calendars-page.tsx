@@ -18,7 +18,7 @@ import { ChooseForMarker } from './choose-for-marker.js';
 export function CalendarsPage() {
   const { t } = useTranslation('calendars');
   const { communityId, communityName } = useCurrentCommunity();
-  const { isOfficer, seesDrafts } = useRolesIn(communityId);
+  const { isOfficer, isElder, seesDrafts } = useRolesIn(communityId);
   const words = useProblemWords();
   const calendars = useQuery(calendarsQuery(communityId));
   const [search] = useSearchParams();
@@ -56,6 +56,7 @@ export function CalendarsPage() {
               key={calendar.id}
               calendar={calendar}
               isOfficer={isOfficer}
+              isElder={isElder}
               seesDrafts={seesDrafts}
               wanted={wanted}
             />

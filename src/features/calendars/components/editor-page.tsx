@@ -2,12 +2,12 @@ import { useSuspenseQuery } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
-import type { Calendar } from '#shared/contracts/calendars.js';
+import type { Calendar, EntryInput } from '#shared/contracts/calendars.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import type { SharingValue } from '#src/lib/sharing-fields.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
-import { useEditor } from '../model/use-editor.js';
+import { useEditor, type Writer } from '../model/use-editor.js';
 import { useEntryActions } from '../model/use-entry-actions.js';
 import { useSaveEntry } from '../model/use-save-entry.js';
 import { useWantedMarker } from '../model/use-wanted-marker.js';
@@ -27,6 +27,8 @@ interface EditorPageProps {
 export interface AboutEntry {
   communityId: string;
   entryId: string;
+  /** As it is saved. */
+  content: EntryInput;
   /** A wider circle that was refused in the form, to be asked for. */
   wanted: SharingValue | null;
   onSettled: () => void;
@@ -37,13 +39,14 @@ export interface AboutEntry {
 export function EditorPage({ lockedAction, about }: EditorPageProps) {
   const { calendarId = '' } = useParams();
   const { data: calendar } = useSuspenseQuery(calendarQuery(calendarId));
-  const { seesDrafts, isOfficer } = useRolesIn(calendar.communityId);
+  const roles = useRolesIn(calendar.communityId);
+  const { seesDrafts, isOfficer } = roles;
   if (!seesDrafts) return <DraftClosed calendar={calendar} />;
   return (
     <DraftEditor
       key={calendar.id}
       calendar={calendar}
-      isOfficer={isOfficer}
+      writer={roles}
       lockedAction={lockedAction(calendar, isOfficer)}
       about={about}
     />
@@ -52,14 +55,14 @@ export function EditorPage({ lockedAction, about }: EditorPageProps) {
 
 interface DraftEditorProps {
   calendar: Calendar;
-  isOfficer: boolean;
+  writer: Writer;
   lockedAction: ReactNode;
   about: EditorPageProps['about'];
 }
 
-function DraftEditor({ calendar, isOfficer, lockedAction, about }: DraftEditorProps) {
+function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps) {
   const { t } = useTranslation('calendars');
-  const editor = useEditor(calendar, isOfficer);
+  const editor = useEditor(calendar, writer);
   useWantedMarker(editor);
   const saving = useSaveEntry(editor);
   const actions = useEntryActions(editor);

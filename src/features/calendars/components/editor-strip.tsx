@@ -29,7 +29,7 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
   const words = useEntryWords();
   const laneWords = useLaneWords();
   const today = useToday(editor);
-  const { calendar, shown, selected, markers, selection, canWrite } = editor;
+  const { calendar, shown, selected, markers, selection, canWriteSelected } = editor;
   const { year } = calendar;
   const byKey = markers.data?.byKey ?? null;
   const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
@@ -66,7 +66,9 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
         chosen={selected?.id ?? null}
         pairing={pairingOf(selected)}
         onChoose={selection.open}
-        onMove={canWrite && form && !editor.stale ? (part, days) => moveDays(form, part, days) : undefined}
+        onMove={
+          canWriteSelected && form && !editor.stale ? (part, days) => moveDays(form, part, days) : undefined
+        }
         handleWords={selected ? handleWords(selected) : undefined}
       />
       {markers.isError && <p className="text-small">{t('editor.stripTrouble')}</p>}

@@ -34,7 +34,7 @@ export function SaveButton({ editor, saving }: { editor: Editor; saving: SaveEnt
 
 export function ToolLinks({ editor, onSubmit }: { editor: Editor; onSubmit: () => void }) {
   const { t } = useTranslation('calendars');
-  const { calendar, canWrite, shown } = editor;
+  const { calendar, canOrder, shown } = editor;
   return (
     <>
       <ButtonLink to={paths.versions(calendar.id)} icon={<Layers aria-hidden size={20} />}>
@@ -45,7 +45,7 @@ export function ToolLinks({ editor, onSubmit }: { editor: Editor; onSubmit: () =
           {t('editor.compare')}
         </ButtonLink>
       )}
-      {canWrite && shown.length > 0 && (
+      {canOrder && shown.length > 0 && (
         <Button icon={<Send aria-hidden className="turns" size={20} />} onClick={onSubmit}>
           {t('editor.submit')}
         </Button>
@@ -68,7 +68,9 @@ export function DraftState({ editor }: { editor: Editor }) {
       <StateChip state="draft">{chip}</StateChip>
       <span>{t('editor.place', { place: calendar.placeName })}</span>
       {unsavedIds.length > 0 && <span>{t('editor.unsaved', { count: unsavedIds.length })}</span>}
-      {!editor.isOfficer && <span>{t('editor.readOnly')}</span>}
+      {!editor.canOrder && !calendar.locked && (
+        <span>{t(editor.isKeeper ? 'editor.readOnlyKeeper' : 'editor.readOnly')}</span>
+      )}
     </span>
   );
 }

@@ -39,7 +39,7 @@ export function WideView(parts: ViewParts) {
       <Mast title={t('editor.title', { year: editor.calendar.year })} under={<DraftState editor={editor} />}>
         <div className="flex flex-wrap items-start justify-end gap-3">
           <ToolLinks {...parts} />
-          {editor.canWrite && editor.selected !== null && (
+          {editor.canWriteSelected && (
             <div>
               <SaveButton {...parts} />
               {closed && <p className="text-center text-small text-umber-soft">{closed.note}</p>}
@@ -79,7 +79,7 @@ export function ListView(parts: ViewParts) {
       {editor.canWrite && (
         <ThumbBar>
           <Button look="main" icon={<Plus aria-hidden size={24} />} onClick={editor.selection.openNew}>
-            {t('editor.add')}
+            {t(editor.isKeeper ? 'editor.addOwn' : 'editor.add')}
           </Button>
         </ThumbBar>
       )}
@@ -106,7 +106,7 @@ export function EntryView(parts: ViewParts) {
       />
       <Notes {...parts} />
       <OpenEntry {...parts} />
-      {editor.canWrite && (
+      {editor.canWriteSelected && (
         <ThumbBar note={closed?.note}>
           <SaveButton {...parts} />
         </ThumbBar>
@@ -144,7 +144,7 @@ function OpenEntry(parts: ViewParts) {
 }
 
 function EntryBoard({ editor, saving, actions, form, selected }: ViewParts & { selected: ShownEntry }) {
-  if (!editor.canWrite || form === null) {
+  if (!editor.canWriteSelected || form === null) {
     return <EntryReading editor={editor} entry={selected} answers={editor.answers.get(selected.id)} />;
   }
   return (

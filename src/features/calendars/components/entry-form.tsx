@@ -3,6 +3,7 @@ import { useTranslation } from 'react-i18next';
 import { useEntryFacts } from '#src/lib/entry-facts.js';
 import { Button } from '#src/ui/button.js';
 import { Fold } from '#src/ui/fold.js';
+import { classNames } from '#src/ui/class-names.js';
 import { Care } from '#src/ui/surfaces.js';
 import type { FieldGroup } from '../model/field-problems.js';
 import type { FormState } from '../model/form-state.js';
@@ -39,7 +40,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
   const board = useRef<HTMLElement>(null);
   const [isChoosing, setIsChoosing] = useState(false);
   const { saved } = entry;
-  const groups = useGroups(board, saved ? ['when'] : ['what', 'when'], saving);
+  const groups = useGroups(board, firstGroups(form, saved !== null), saving);
   const { isWide } = editor.selection;
   useFocusOnNew(groups, saved === null && isWide);
   const answers = editor.answers.get(entry.id);
@@ -49,7 +50,11 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
   };
 
   return (
-    <section ref={board} className="board @container" aria-labelledby={headingId}>
+    <section
+      ref={board}
+      className={classNames('board @container', form.isKeepers && 'big-words')}
+      aria-labelledby={headingId}
+    >
       <div className="flex items-center justify-between gap-2">
         <EntryHeading id={headingId} content={entry.content} villageLanguage={form.villageLanguage} />
         {saved && isWide && <EntryTools entry={saved} actions={actions} />}
@@ -113,6 +118,12 @@ function useFocusOnNew({ goTo }: Groups, isWanted: boolean): void {
   useEffect(() => {
     if (isWanted) go.current('what');
   }, [isWanted]);
+}
+
+/** What stands open at first: of an elder's own entry its words alone. */
+function firstGroups({ isKeepers }: FormState, isSaved: boolean): FieldGroup[] {
+  if (isKeepers) return ['what'];
+  return isSaved ? ['when'] : ['what', 'when'];
 }
 
 const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'late', 'whose'];

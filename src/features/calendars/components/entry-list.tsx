@@ -2,6 +2,7 @@ import { ArrowDownUp, Check, Plus } from 'lucide-react';
 import { useEffect, useRef, useState, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
+import { KeptLine } from '#src/lib/kept-line.js';
 import { Button } from '#src/ui/button.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import type { Editor } from '../model/use-editor.js';
@@ -47,14 +48,15 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
           ))}
         </ol>
       )}
+      <KeptLine keptCount={editor.keptCount} />
       {canWrite && (
         <div className="mt-3 flex flex-wrap gap-3">
           {isWide && (
             <Button icon={<Plus aria-hidden size={20} />} onClick={selection.openNew}>
-              {t('editor.add')}
+              {t(editor.isKeeper ? 'editor.addOwn' : 'editor.add')}
             </Button>
           )}
-          {shown.length > 1 && (
+          {editor.canOrder && shown.length > 1 && (
             <Button
               icon={isOrdering ? <Check aria-hidden size={20} /> : <ArrowDownUp aria-hidden size={20} />}
               aria-pressed={isOrdering}

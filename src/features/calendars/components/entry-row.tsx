@@ -3,6 +3,7 @@ import { useTranslation } from 'react-i18next';
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
+import { KeptChip } from '#src/lib/level-chip.js';
 import { paths } from '#src/lib/paths.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { StateIcon } from '#src/ui/icons/state-icon.js';
@@ -43,6 +44,7 @@ export function EntryRow(props: EntryRowProps) {
         <span className="range-line">
           {dates === null ? t('days.notYet') : words.window(content, dates.window, year)}
         </span>
+        <KeptChip level={content.sharingLevel} details={content.sharing} />
         <RowMarks {...props} />
       </span>
       {!isWide && dates?.window && (

@@ -1,6 +1,7 @@
 import { Plus } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { KeptLine } from '#src/lib/kept-line.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -37,13 +38,14 @@ export function ListState({ editor, children }: { editor: Editor; children: Reac
           canWrite &&
           selection.isWide && (
             <Button look="main" icon={<Plus aria-hidden size={22} />} onClick={selection.openNew}>
-              {t('editor.addFirst')}
+              {t(editor.isKeeper ? 'editor.addOwn' : 'editor.addFirst')}
             </Button>
           )
         }
       >
         {canWrite ? t('editor.emptyHint') : t('editor.emptyReader')}
       </EmptyState>
+      <KeptLine keptCount={editor.keptCount} />
     </Board>
   );
 }

@@ -1,5 +1,5 @@
 import { useTranslation } from 'react-i18next';
-import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { GIVER_BY_ROLE, PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { PersonSelect, SharingFields } from '#src/lib/sharing-fields.js';
 import { TextAreaField, TextField, TickField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
@@ -36,21 +36,28 @@ export function LateFields({ form }: { form: FormState }) {
   );
 }
 
+/** What an elder's own entry can be; everything wider is the officer's to write. */
+const KEPT_LEVELS = ['group', 'elders', 'sealed'] as const;
+
 /** Whose knowledge it is, what was agreed about it, and who may see it. */
 export function WhoseFields({ form }: { form: FormState }) {
   const { t } = useTranslation(['calendars', 'sharing']);
   const { draft, change, at } = form;
   return (
     <div className="grid gap-4">
-      <TextField
-        label={t('form.giver')}
-        hint={t('form.giverHint')}
-        value={draft.giver}
-        problem={at('giver')}
-        onChange={(event) => {
-          change({ giver: event.currentTarget.value });
-        }}
-      />
+      {draft.giver === GIVER_BY_ROLE ? (
+        <p>{t('sharing:byRoleOnly')}</p>
+      ) : (
+        <TextField
+          label={t('form.giver')}
+          hint={t('form.giverHint')}
+          value={draft.giver}
+          problem={at('giver')}
+          onChange={(event) => {
+            change({ giver: event.currentTarget.value });
+          }}
+        />
+      )}
       <TickField
         label={t('form.agreedToPrint')}
         hint={t('form.agreedToPrintHint')}
@@ -60,17 +67,20 @@ export function WhoseFields({ form }: { form: FormState }) {
           change({ agreedToPrint: event.currentTarget.checked });
         }}
       />
-      <PersonSelect
-        label={t('sharing:giver')}
-        hint={t('sharing:giverHint')}
-        nobody={t('sharing:giverMe')}
-        value={draft.giverId ?? null}
-        problem={at('giverId')}
-        onChange={(giverId) => {
-          change({ giverId });
-        }}
-      />
+      {!form.isKeepers && (
+        <PersonSelect
+          label={t('sharing:giver')}
+          hint={t('sharing:giverHint')}
+          nobody={t('sharing:giverMe')}
+          value={draft.giverId ?? null}
+          problem={at('giverId')}
+          onChange={(giverId) => {
+            change({ giverId });
+          }}
+        />
+      )}
       <SharingFields
+        levels={form.isKeepers ? KEPT_LEVELS : undefined}
         label={t('form.sharingLevel')}
         value={{ level: draft.sharingLevel, details: draft.sharing ?? PLAIN_DETAILS }}
         problem={(field) => at(field === 'level' ? 'sharingLevel' : `sharing.${field}`)}

@@ -16,6 +16,7 @@ export function useAskedCircle(editor: Editor, problems: FieldProblems): AboutEn
   return {
     communityId: calendar.communityId,
     entryId: saved.id,
+    content: saved.content,
     wanted: isRefused ? { level: sharingLevel, details: sharing ?? PLAIN_DETAILS } : null,
     onSettled: () => {
       if (!isRefused) return;

@@ -37,5 +37,6 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
     inUse,
     villageLanguage: community?.villageLanguage ?? null,
     officerLanguage: community?.officerLanguage ?? null,
+    isKeepers: editor.isKeeper,
   };
 }

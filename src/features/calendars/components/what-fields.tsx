@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
+import { More } from '#src/ui/fold.js';
 import { SelectField, TextAreaField, TextField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
 import { IconField } from './icon-field.js';
@@ -7,7 +8,7 @@ import { IconField } from './icon-field.js';
 /** What is done: its name in both languages, its kind and picture, crop, notes and caution. */
 export function WhatFields({ form }: { form: FormState }) {
   const { t } = useTranslation('calendars');
-  const { draft, change, at, officerLanguage, villageLanguage } = form;
+  const { draft, change, at, officerLanguage, villageLanguage, isKeepers } = form;
   return (
     <div className="grid gap-4">
       <TextField
@@ -29,6 +30,36 @@ export function WhatFields({ form }: { form: FormState }) {
           change({ titleVillage: event.currentTarget.value });
         }}
       />
+      {!isKeepers && <KindFields form={form} />}
+      <TextAreaField
+        label={t('form.notes')}
+        hint={t('form.notesHint')}
+        rows={3}
+        value={draft.notes}
+        problem={at('notes')}
+        onChange={(event) => {
+          change({ notes: event.currentTarget.value });
+        }}
+      />
+      {isKeepers ? (
+        <More label={t('form.moreOfIt')}>
+          <div className="mt-3 grid gap-4">
+            <KindFields form={form} />
+            <CautionField form={form} />
+          </div>
+        </More>
+      ) : (
+        <CautionField form={form} />
+      )}
+    </div>
+  );
+}
+
+function KindFields({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const { draft, change, at } = form;
+  return (
+    <>
       <div className="grid gap-4 @min-[34rem]:grid-cols-2">
         <SelectField
           label={t('form.kind')}
@@ -54,26 +85,23 @@ export function WhatFields({ form }: { form: FormState }) {
         />
       </div>
       <IconField form={form} />
-      <TextAreaField
-        label={t('form.notes')}
-        hint={t('form.notesHint')}
-        rows={3}
-        value={draft.notes}
-        problem={at('notes')}
-        onChange={(event) => {
-          change({ notes: event.currentTarget.value });
-        }}
-      />
-      <TextAreaField
-        label={t('form.caution')}
-        hint={t('form.cautionHint')}
-        rows={2}
-        value={draft.caution}
-        problem={at('caution')}
-        onChange={(event) => {
-          change({ caution: event.currentTarget.value });
-        }}
-      />
-    </div>
+    </>
+  );
+}
+
+function CautionField({ form }: { form: FormState }) {
+  const { t } = useTranslation('calendars');
+  const { draft, change, at } = form;
+  return (
+    <TextAreaField
+      label={t('form.caution')}
+      hint={t('form.cautionHint')}
+      rows={2}
+      value={draft.caution}
+      problem={at('caution')}
+      onChange={(event) => {
+        change({ caution: event.currentTarget.value });
+      }}
+    />
   );
 }

@@ -110,6 +110,11 @@ export function newDraft(wanted: WantedLead | null = null): EntryDraft {
   };
 }
 
+/** A new entry of an elder: what they keep begins with the elders. */
+export function keptDraft(wanted: WantedLead | null = null): EntryDraft {
+  return { ...newDraft(wanted), kind: 'community', icon: 'community', sharingLevel: 'elders' };
+}
+
 /** True where saving the draft would change what is saved. Spaces at the ends do not count. */
 export function differsFrom(draft: EntryDraft, saved: EntryInput): boolean {
   return !sameContent(contentOf(draft), saved);

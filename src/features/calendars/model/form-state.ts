@@ -27,6 +27,8 @@ export interface FormState {
   inUse: ReadonlySet<string>;
   villageLanguage: Language | null;
   officerLanguage: Language | null;
+  /** An elder's own entry: its first fields are few, and it is kept. */
+  isKeepers: boolean;
 }
 
 /** The star or figure that the entry goes by; null for a fixed date, or while none is chosen or known. */

@@ -9,40 +9,48 @@ import {
   versionQuery,
   versionsQuery,
 } from '#src/lib/calendar-queries.js';
+import type { RolesIn } from '#src/lib/roles-in.js';
 import { entriesQuery } from '../api/calendars-queries.js';
 import { answersByEntry, type EntryAnswers } from './elder-requests.js';
-import { contentOf, newDraft } from './entry-draft.js';
+import { contentOf, keptDraft, newDraft } from './entry-draft.js';
 import { draftFor, isStale, orphans, shownEntries } from './shown-entries.js';
 import { specsOf, useSigns } from './signs.js';
 import { NO_EDITS, useEntryEdits } from './use-entry-edits.js';
 import { useSelection } from './use-selection.js';
 
+/** Officers write the village's entries, elders those that their people keep. */
+export type Writer = Pick<RolesIn, 'isOfficer' | 'isElder'>;
+
 export type Editor = ReturnType<typeof useEditor>;
 
 /** Everything that the editor's screen shows: what is saved, what is written over it, what is open. */
-export function useEditor(calendar: Calendar, isOfficer: boolean) {
+export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
   const { id, year, placeId, communityId, locked } = calendar;
   const entries = useQuery(entriesQuery(id));
   const markers = useQuery(markersQuery(placeId, year));
   const community = useQuery(communityQuery(communityId));
   const edits = useEntryEdits(id);
   const selection = useSelection();
-  const canWrite = isOfficer && !locked;
+  const canWrite = (isOfficer || isElder) && !locked;
+  const isKeeper = isElder && !isOfficer;
   // A locked draft is shown as it is saved; what was written before waits on this device.
   const writing = canWrite ? edits.all : NO_EDITS;
 
-  const newStart = useMemo(() => newDraft(selection.wanted), [selection.wanted]);
+  const newStart = useMemo(
+    () => (isKeeper ? keptDraft(selection.wanted) : newDraft(selection.wanted)),
+    [isKeeper, selection.wanted],
+  );
   const signs = useSigns(
     placeId,
     year,
     // Those being written, one that a new entry shall go by, and those saved: the open one shows all of its days.
     useMemo(() => {
       const written = [...writing.values()].map(({ draft }) => contentOf(draft));
-      const saved = (entries.data ?? []).map(({ content }) => content);
+      const saved = (entries.data?.items ?? []).map(({ content }) => content);
       return specsOf([...saved, ...written, contentOf(newStart)]);
     }, [writing, entries.data, newStart]),
   );
-  const saved = useMemo(() => entries.data ?? [], [entries.data]);
+  const saved = useMemo(() => entries.data?.items ?? [], [entries.data]);
   const shown = useMemo(
     () =>
       shownEntries({
@@ -63,8 +71,14 @@ export function useEditor(calendar: Calendar, isOfficer: boolean) {
 
   return {
     calendar,
+    /** Somebody who may add entries and write on their own. */
     canWrite,
-    isOfficer,
+    /** The village's order and its submission. */
+    canOrder: isOfficer && !locked,
+    /** An elder, who writes what is kept and reads all else. */
+    isKeeper,
+    canWriteSelected: canWrite && selected !== null && (selected.saved?.mine ?? true),
+    keptCount: entries.data?.keptCount ?? 0,
     entries,
     markers,
     signs,

@@ -23,7 +23,7 @@ import { useChartNames } from './use-chart-names.js';
 interface FigurePageProps {
   days: (markerKey: string) => ReactNode;
   /** Who may see it, and what else belongs to it. */
-  about: (figureId: string) => ReactNode;
+  about: (figure: FigureDetail) => ReactNode;
 }
 
 /** A figure to read: names, story, other tellings, where it is in the sky, and its four days. */
@@ -59,7 +59,7 @@ export function FigurePage({ days, about }: FigurePageProps) {
           <Story figure={figure} />
           <InTheSky figure={figure} />
           {mayWrite && <FigureUses figure={figure} />}
-          {about(figure.id)}
+          {about(figure)}
         </div>
         <div className="grid gap-4">
           {days(figure.markerKey)}

@@ -1,4 +1,6 @@
 import { Trans, useTranslation } from 'react-i18next';
+import { useGiverWords } from '#src/lib/giver-words.js';
+import { KeptChip } from '#src/lib/level-chip.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -12,6 +14,7 @@ import { EntryDays } from './entry-days.js';
 export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
   const { t } = useTranslation(['reviews', 'variants']);
   const sharing = useSharingWords();
+  const giverWords = useGiverWords();
   const words = useDateWords();
   const { content, dates } = entry;
   const say = useEntrySentences(entry, header.markers, header.year);
@@ -31,6 +34,9 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
           </span>
         </h1>
       </div>
+      <p>
+        <KeptChip level={content.sharingLevel} details={content.sharing} />
+      </p>
       <p className="review-best">
         {window === null ? (
           t('noWindow')
@@ -76,7 +82,7 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
         </Care>
       )}
       <p className="text-umber-soft">
-        {content.giver !== '' && `${t('giver', { giver: content.giver })}. `}
+        {content.giver !== '' && `${t('giver', { giver: giverWords(content.giver) })}. `}
         {sharing(content.sharingLevel, content.sharing)}.{' '}
         {content.agreedToPrint ? t('printYes') : t('printNo')}
       </p>

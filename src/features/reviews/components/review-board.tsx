@@ -121,6 +121,7 @@ function StewardSign({ version }: { version: Version }) {
   return (
     <div className="grid gap-2">
       <p>{t('board.stewardHint')}</p>
+      <p>{t('board.stewardKept')}</p>
       <Button
         look="main"
         busy={sign.isPending}

@@ -2,6 +2,7 @@ import { PenLine } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import type { Answer } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
+import { KeptLine } from '#src/lib/kept-line.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { AnswerIcon } from '#src/ui/icons/answer-icon.js';
@@ -43,6 +44,7 @@ export function ReviewEnd({
         </div>
       )}
       {speaksForSelf && <SignPart version={version} />}
+      <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />
       <h2 className="review-part">{t('end.list')}</h2>
       <ol>
         {version.entries.map(({ entryId, content }, index) => {

@@ -3,7 +3,7 @@ import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
 import type { Answer, ElderProgress } from '#shared/contracts/reviews.js';
-import type { Version } from '#shared/contracts/versions.js';
+import type { Version, VersionEntry } from '#shared/contracts/versions.js';
 import { useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
 import { useSession } from '#src/lib/session.js';
@@ -17,8 +17,8 @@ import { ForWhom, type Spokesman } from './for-whom.js';
 import { OthersWords } from './others-words.js';
 import { ReviewEnd } from './review-end.js';
 
-/** What was spoken and photographed about an entry, with the way to add more. */
-export type Voices = (entryId: string) => ReactNode;
+/** What belongs to an entry besides its words: voices, notes, who may see it. */
+export type About = (entry: VersionEntry) => ReactNode;
 
 const END = 'end';
 
@@ -26,11 +26,11 @@ const END = 'end';
 export function ReviewRound({
   version,
   answers,
-  voices,
+  about,
 }: {
   version: Version;
   answers: { items: Answer[]; progress: ElderProgress[] };
-  voices: Voices;
+  about: About;
 }) {
   const { t } = useTranslation('reviews');
   const { is } = useRoles();
@@ -103,7 +103,7 @@ export function ReviewRound({
                 (each) => each.entryId === entry.entryId && each.elderId !== elderId,
               )}
             />
-            {voices(entry.entryId)}
+            {about(entry)}
             <p className="text-umber-soft">{t('silence')}</p>
             <div className="flex flex-wrap justify-between gap-2">
               <Button

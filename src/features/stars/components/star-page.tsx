@@ -29,14 +29,21 @@ import { StarWays } from './star-ways.js';
 import { YearBoard } from './year-board.js';
 
 /** One star or figure from the place on screen: its year, its four days, and what they rest on. */
-export function StarPage() {
+export function StarPage({ notes }: { notes: (markerKey: string) => React.ReactNode }) {
   const { t } = useTranslation('stars');
   const { markerKey = '' } = useParams();
   const [search] = useSearchParams();
   const { place, places, isLoading } = useCurrentPlace();
   const shown = places.find((each) => each.id === search.get('placeId')) ?? place;
   if (shown !== null) {
-    return <StarAtPlace key={`${markerKey} ${shown.id}`} place={shown} markerKey={markerKey} />;
+    return (
+      <StarAtPlace
+        key={`${markerKey} ${shown.id}`}
+        place={shown}
+        markerKey={markerKey}
+        notes={notes(markerKey)}
+      />
+    );
   }
   return (
     <Page>
@@ -48,7 +55,13 @@ export function StarPage() {
 
 const PAUSE_MS = 250;
 
-function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) {
+interface StarAtPlaceProps {
+  place: Place;
+  markerKey: string;
+  notes: React.ReactNode;
+}
+
+function StarAtPlace({ place, markerKey, notes }: StarAtPlaceProps) {
   const { t } = useTranslation('stars');
   const words = useProblemWords();
   const [search, setSearch] = useSearchParams();
@@ -96,6 +109,7 @@ function StarAtPlace({ place, markerKey }: { place: Place; markerKey: string }) 
       list={list}
       isLate={isPlaceholderData || settledYear !== year}
       notice={error !== null && <OldData updatedAt={dataUpdatedAt} refetch={refetch} />}
+      notes={notes}
       yearStepper={<YearStepper className="w-44" labelForEars year={year} onChange={changeYear} />}
     />
   );
@@ -107,10 +121,11 @@ interface StarScreenProps {
   list: string;
   isLate: boolean;
   notice: React.ReactNode;
+  notes: React.ReactNode;
   yearStepper: React.ReactNode;
 }
 
-function StarScreen({ star, place, list, isLate, notice, yearStepper }: StarScreenProps) {
+function StarScreen({ star, place, list, isLate, notice, notes, yearStepper }: StarScreenProps) {
   const { t } = useTranslation('stars');
   const mayTie = useRoles().is('officer');
   const naming = useStarNaming()(star);
@@ -152,6 +167,7 @@ function StarScreen({ star, place, list, isLate, notice, yearStepper }: StarScre
           <div className="grid gap-4">
             <StarWays markerKey={star.markerKey} placeId={place.id} year={star.year} />
             <BasisBoard star={star} dates={dates} placeId={place.id} />
+            {notes}
           </div>
         </div>
       </div>

@@ -3,7 +3,8 @@ import { Printer } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useParams, useSearchParams } from 'react-router-dom';
-import { calendarQuery, versionsQuery } from '#src/lib/calendar-queries.js';
+import { calendarQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
+import { KeptLine } from '#src/lib/kept-line.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -114,12 +115,22 @@ function Compared({
     );
   }
   return (
-    <CompareResult
-      calendarId={calendarId}
-      comparison={comparison.data}
-      seesDrafts={seesDrafts}
-      show={show}
-      onShow={setShow}
-    />
+    <>
+      <CompareResult
+        calendarId={calendarId}
+        comparison={comparison.data}
+        seesDrafts={seesDrafts}
+        show={show}
+        onShow={setShow}
+      />
+      {sides.to !== 'draft' && <KeptInNewer calendarId={calendarId} number={Number(sides.to)} />}
+    </>
   );
+}
+
+/** What the newer side holds beyond what this person sees. */
+function KeptInNewer({ calendarId, number }: { calendarId: string; number: number }) {
+  const { data: version } = useQuery(versionQuery(calendarId, number));
+  if (version === undefined) return null;
+  return <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />;
 }

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
@@ -6,14 +7,21 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
 import { TakeBackLink } from '#src/lib/take-back-link.js';
+import { KeptLine } from '#src/lib/kept-line.js';
+import { KeptChip } from '#src/lib/level-chip.js';
 import { More } from '#src/ui/fold.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { WindowBar } from '#src/ui/pictures/window-bar.js';
 import { Board } from '#src/ui/surfaces.js';
 import { Seal } from './seal-board.js';
 
+interface FrozenEntriesProps {
+  version: Version;
+  about?: ((entry: VersionEntry) => ReactNode) | undefined;
+}
+
 /** The entries of a version in their order, each with its days; everything else one press away. */
-export function FrozenEntries({ version }: { version: Version }) {
+export function FrozenEntries({ version, about }: FrozenEntriesProps) {
   const { t } = useTranslation('versions');
   const { header, entries } = version;
   const markers: NamesByKey = new Map(header.markers.map((marker) => [marker.markerKey, marker]));
@@ -23,10 +31,11 @@ export function FrozenEntries({ version }: { version: Version }) {
       <ol className="frozen-entries">
         {entries.map((entry) => (
           <li key={entry.entryId}>
-            <FrozenEntry entry={entry} header={header} markers={markers} />
+            <FrozenEntry entry={entry} header={header} markers={markers} about={about} />
           </li>
         ))}
       </ol>
+      <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />
     </Board>
   );
 }
@@ -35,9 +44,10 @@ interface FrozenEntryProps {
   entry: VersionEntry;
   header: VersionHeader;
   markers: NamesByKey;
+  about: FrozenEntriesProps['about'];
 }
 
-function FrozenEntry({ entry, header, markers }: FrozenEntryProps) {
+function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
   const words = useEntryWords();
   const dateWords = useDateWords();
   const { content, dates } = entry;
@@ -55,6 +65,7 @@ function FrozenEntry({ entry, header, markers }: FrozenEntryProps) {
             </span>
           )}
         </h3>
+        <KeptChip level={content.sharingLevel} details={content.sharing} />
         <p className="range-line">
           <strong>{words.window(content, dates.window, year)}</strong>
         </p>
@@ -74,6 +85,7 @@ function FrozenEntry({ entry, header, markers }: FrozenEntryProps) {
           />
         )}
         <EntryRest entry={entry} year={year} markers={markers} />
+        {about?.(entry)}
       </div>
     </div>
   );

@@ -30,8 +30,7 @@ export function useCompareReasons(
   const { data: versions } = useQuery(versionsQuery(calendarId));
   const { data: entries } = useQuery({
     queryKey: calendarKeys.entries(calendarId),
-    queryFn: async ({ signal }) =>
-      (await callApi(calendarsEndpoints.listEntries, { params: { calendarId }, signal })).items,
+    queryFn: ({ signal }) => callApi(calendarsEndpoints.listEntries, { params: { calendarId }, signal }),
     enabled: seesDrafts && to === 'draft',
   });
   return useMemo(
@@ -40,7 +39,7 @@ export function useCompareReasons(
       const asked = askedBy(entry, answers?.items ?? []).map(({ elderName: name, note }) =>
         note === '' ? t('compare.askedByPlain', { name }) : t('compare.askedBy', { name, note }),
       );
-      const writer = putInBy(entry, to, versions ?? [], entries ?? []);
+      const writer = putInBy(entry, to, versions ?? [], entries?.items ?? []);
       if (writer === null) return asked;
       const key = to === 'draft' ? 'compare.savedBy' : 'compare.submittedBy';
       return [...asked, t(key, { name: writer.name, when: dates.moment(writer.at) })];

@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
+import { useGiverWords } from '#src/lib/giver-words.js';
 import { signed } from '#src/lib/signed.js';
 import type { CompareWords } from '../model/entry-sentences.js';
 import type { ShownField } from '../model/shown-fields.js';
@@ -7,6 +8,7 @@ import type { ShownField } from '../model/shown-fields.js';
 /** One field of an entry as words; empty where there is nothing. */
 export function useFieldValue(words: CompareWords): (field: ShownField, body: VersionEntryBody) => string {
   const { t } = useTranslation(['versions', 'calendars']);
+  const giverWords = useGiverWords();
   const yesNo = (is: boolean) => t(is ? 'value.yes' : 'value.no');
   return (field, body) => {
     const { content, dates } = body;
@@ -30,6 +32,8 @@ export function useFieldValue(words: CompareWords): (field: ShownField, body: Ve
         return words.kind(content.kind);
       case 'icon':
         return words.icon(content.icon);
+      case 'giver':
+        return giverWords(content.giver);
       case 'sharingLevel':
         return words.level(content.sharingLevel);
       case 'agreedToPrint':

@@ -4,7 +4,12 @@ import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Navigate, useParams } from 'react-router-dom';
 import { wasPublished } from '#shared/calendar/version-state.js';
-import { submissionNumber, type Version, type VersionSummary } from '#shared/contracts/versions.js';
+import {
+  submissionNumber,
+  type Version,
+  type VersionEntry,
+  type VersionSummary,
+} from '#shared/contracts/versions.js';
 import { calendarQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
@@ -25,15 +30,17 @@ import { VersionActions } from './version-actions.js';
 interface VersionPageProps {
   /** How far the elders are, the way into the review and signing: they belong to the reviews. */
   review?: ((version: Version) => ReactNode) | undefined;
+  /** The way to what belongs to an entry: notes, voices, who may see it. */
+  about?: ((entry: VersionEntry) => ReactNode) | undefined;
 }
 
 /** A version as it was frozen, what is missing before it is signed off, and what can be done with it. */
-export function VersionPage({ review }: VersionPageProps) {
+export function VersionPage({ review, about }: VersionPageProps) {
   const { calendarId = '', number = '' } = useParams();
   const isNumber = submissionNumber.safeParse(number).success;
   // "draft" is no frozen version: its page is the editor.
   if (!isNumber) return <Navigate to={paths.calendar(calendarId)} replace />;
-  return <FrozenVersion calendarId={calendarId} number={Number(number)} review={review} />;
+  return <FrozenVersion calendarId={calendarId} number={Number(number)} review={review} about={about} />;
 }
 
 interface FrozenVersionProps extends VersionPageProps {
@@ -41,7 +48,7 @@ interface FrozenVersionProps extends VersionPageProps {
   number: number;
 }
 
-function FrozenVersion({ calendarId, number, review }: FrozenVersionProps) {
+function FrozenVersion({ calendarId, number, review, about }: FrozenVersionProps) {
   const { t } = useTranslation('versions');
   // Asked for together: one after the other would be three ways to the server.
   const [{ data: calendar }, { data: version }, { data: versions }] = useSuspenseQueries({
@@ -70,7 +77,7 @@ function FrozenVersion({ calendarId, number, review }: FrozenVersionProps) {
       {review !== undefined && <div className="mb-4">{review(version)}</div>}
       <FrozenStrip version={version} />
       <Columns wider="first">
-        <FrozenEntries version={version} />
+        <FrozenEntries version={version} about={about} />
         <div className="grid gap-4">
           {isOpen && <SignaturesBoard version={version} />}
           <BasisBoard header={version.header} />

@@ -25,7 +25,7 @@ async function open(markerKey: string, { year = 2027, session = OFFICER, state =
     [`GET /api/places/${TAZIMEL.id}/stars/${markerKey}`]: (_: Sent, search: URLSearchParams) =>
       starDetail(markerKey, Number(search.get('year'))),
   });
-  const view = await renderOnBoard(<StarPage />, {
+  const view = await renderOnBoard(<StarPage notes={() => null} />, {
     session,
     path: `/stars/${markerKey}?year=${year}${state}`,
     pattern: '/stars/:markerKey',

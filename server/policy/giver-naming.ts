@@ -1,0 +1,34 @@
+import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
+import type { Shared } from './policy.js';
+import type { Viewer } from './viewer.js';
+
+interface Given {
+  giver: string;
+  giverId?: string | null | undefined;
+}
+
+/** Is the giver's name kept from this person? Givers read their own; for all others their wish holds as it is today. */
+export function hidesGiver(viewer: Viewer, shared: Shared | undefined): boolean {
+  if (shared === undefined || shared.details.naming === 'named') return false;
+  return shared.giverId !== viewer.personId;
+}
+
+/** A content with its giver named as they wish: by name, as somebody of their role, or not at all. */
+export function withNaming<C extends Given>(viewer: Viewer, shared: Shared | undefined, content: C): C {
+  if (shared === undefined || !hidesGiver(viewer, shared)) return content;
+  const giver = shared.details.naming === 'role' ? GIVER_BY_ROLE : '';
+  return { ...content, giver, ...(content.giverId === undefined ? {} : { giverId: null }) };
+}
+
+/** What somebody writes over a content whose giver was kept from them: the giver stays as they are. */
+export function withKeptGiver<C extends Given>(
+  viewer: Viewer,
+  shared: Shared | undefined,
+  stored: C,
+  written: C,
+): C {
+  if (!hidesGiver(viewer, shared)) return written;
+  const { giverId: _written, ...rest } = written;
+  const kept = stored.giverId === undefined ? {} : { giverId: stored.giverId };
+  return { ...rest, giver: stored.giver, ...kept } as C;
+}
