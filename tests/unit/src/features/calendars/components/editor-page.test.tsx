@@ -313,7 +313,9 @@ describe('the draft for others', () => {
       memberships: [{ communityId: CALENDAR.communityId, communityName: 'Upper Tazimel', roles: [role] }],
     });
     const elder = await open('', as('elder'));
-    expect(await screen.findByText('You read the village’s entries and write those that you keep.')).toBeTruthy();
+    expect(
+      await screen.findByText('You read the village’s entries and write those that you keep.'),
+    ).toBeTruthy();
     expect(await screen.findByText('Soil wet to a hand depth')).toBeTruthy();
     elder.unmount();
     await open('', as('observer'));
