@@ -70,6 +70,36 @@ export function boardTiming(
   return { window: entry.window, drivenBy: 'entry', beside: others };
 }
 
+/** An entry with the variants beside it, as versions and drafts hold it; `forBoard` says what everybody may see. */
+export interface BoardBody {
+  content: { kind: string; hasLastDate: boolean; protectiveWatch: boolean; board?: BoardChoice | undefined };
+  dates: { window: EntryWindow | null };
+  variants?:
+    | readonly {
+        variantId: string;
+        forBoard: boolean;
+        content: { difference: string };
+        dates: { window: EntryWindow | null };
+      }[]
+    | undefined;
+}
+
+/** What the village's board goes by: the entry's days and those variants that everybody of the village may see. */
+export function boardOf({ content, dates, variants = [] }: BoardBody): BoardTiming {
+  const { kind, hasLastDate, protectiveWatch, board = null } = content;
+  return boardTiming(
+    { kind, hasLastDate, protectiveWatch, window: dates.window },
+    variants
+      .filter(({ forBoard }) => forBoard)
+      .map(({ variantId, content: { difference }, dates: own }) => ({
+        variantId,
+        isObjection: difference === 'not-on-a-board',
+        window: own.window,
+      })),
+    board,
+  );
+}
+
 /** Later of the starts, earlier of the ends; null where no day is left. */
 function narrowest(windows: readonly EntryWindow[]): EntryWindow | null {
   const [first] = windows;

@@ -1,9 +1,9 @@
+import { boardOf } from '#shared/calendar/variants.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import type { SheetEntry } from '#shared/sheet/sheet-model.js';
 import type { SheetWords } from '#shared/sheet/sheet-words.js';
 import type { Translate } from '../../print/translator.js';
-import { boardOf } from '../versions/board.service.js';
 import { whyNoDate } from './why-no-date.js';
 
 export interface EntryTexts {

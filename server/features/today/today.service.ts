@@ -1,3 +1,4 @@
+import { boardOf } from '#shared/calendar/variants.js';
 import { boardDayOf } from '#shared/calendar/board-days.js';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { Place } from '#shared/contracts/places.js';
@@ -10,7 +11,6 @@ import type { CalendarsService } from '../calendars/calendars.service.js';
 import type { ConsentsService } from '../consents/consents.service.js';
 import { civilDateAt } from '../places/place-day.service.js';
 import type { PlacesService } from '../places/places.service.js';
-import { boardOf } from '../versions/board.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import type { ComingMarkersService, PublishedCalendar } from './coming-markers.service.js';
 import { comingSigns } from './coming-signs.service.js';

@@ -1,11 +1,13 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { boardOf } from '#shared/calendar/variants.js';
 import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
+import { VariantList } from '#src/lib/variant-list.js';
 import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { KeptLine } from '#src/lib/kept-line.js';
 import { KeptChip } from '#src/lib/level-chip.js';
@@ -84,9 +86,30 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
               .map(({ dayNumber }) => dayNumber)}
           />
         )}
+        <BesideIt entry={entry} year={year} markers={markers} />
         <EntryRest entry={entry} year={year} markers={markers} />
         {about?.(entry)}
       </div>
+    </div>
+  );
+}
+
+/** Other keepers' timings, and the days by which the board goes where they are not the entry's own. */
+function BesideIt({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
+  const { t } = useTranslation('variants');
+  const words = useEntryWords();
+  const { variants, content } = entry;
+  if (variants === undefined) return null;
+  const { window, drivenBy } = boardOf(entry);
+  return (
+    <div className="mt-2 grid gap-2">
+      {drivenBy !== 'entry' && (
+        <p>
+          {window ? t('board.days', { days: words.windowSentence(window) }) : t('board.noDays')}
+          {content.board !== undefined && ` ${t('board.reasonShown', { reason: content.board.reason })}`}
+        </p>
+      )}
+      <VariantList variants={variants} year={year} markers={markers} />
     </div>
   );
 }
