@@ -210,7 +210,7 @@ export function createApp(options: AppOptions): App {
   notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
-  const answers = new AnswersService(dataSource, clock);
+  const answers = new AnswersService(dataSource, clock, cardSignIn);
   reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
   const erasers = erasersOf(attachmentFiles, clock);

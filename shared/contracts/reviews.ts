@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { pin } from './cards.js';
 import { id, instant, line, listOf, text } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { signatureRole, submissionNumber, version } from './versions.js';
@@ -20,6 +21,7 @@ export const answer = z.strictObject({
   letStand: z.boolean(),
   /** Set when somebody else wrote the answer down. */
   recordedByName: z.string().nullable(),
+  /** Null with a recorder: the elder proved it with their PIN. */
   witness: z.string().nullable(),
   answeredAt: instant,
   /** The asking person gave it, or may speak for its elder. */
@@ -31,12 +33,14 @@ export const answerInput = z
   .strictObject({
     answer: answerWord,
     note: text(1000),
-    /** Set by an officer or steward who writes down an elder's spoken word. */
+    /** Set by whoever writes down an elder's spoken word. */
     onBehalfOf: id.nullable(),
     witness: line(120).nullable(),
+    /** The elder's own PIN, typed by them on the helper's device: it stands instead of a witness. */
+    pin: pin.optional(),
   })
   .superRefine((input, context) => {
-    if (input.onBehalfOf !== null && !input.witness) {
+    if (input.onBehalfOf !== null && !input.witness && input.pin === undefined) {
       context.addIssue({ code: 'custom', path: ['witness'], message: 'witness-required' });
     }
     if (input.answer === 'change-this' && input.note.length === 0) {

@@ -6,7 +6,16 @@ import { SignInCardEntity } from '#server/db/entities/sign-in-card.entity.js';
 import type { AuditEvent } from '#shared/contracts/audit.js';
 import type { CardHolder, MadeCard } from '#shared/contracts/cards.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import type { Answer } from '#shared/contracts/reviews.js';
 import { openTestApi, TEST_NOW, type Client, type TestApi } from '#tests/support/api.js';
+import {
+  addEntry,
+  beginCalendar,
+  openVillage,
+  says,
+  submit,
+  versionPath,
+} from '#tests/support/calendar-api.js';
 import { readPdfText } from '#tests/support/pdf/read-text.js';
 
 const PIN = '4711';
@@ -224,7 +233,7 @@ describe('ending a card', () => {
   it('is open to its owner, and to nobody else but the steward', async () => {
     const { client } = await cardInUse();
     const elder3 = await api.signIn('elder3');
-    await elder3.delete(cardPath(elder3, elder.personId)).expect(403);
+    await elder3.delete(cardPath(elder3, elder.personId)).expect(409);
     const own = (await client.get(`/api/communities/${client.communityId}/cards`).expect(200)).body as {
       items: CardHolder[];
     };
@@ -241,6 +250,41 @@ describe('ending a card', () => {
     await client.get('/api/calendars').expect(200);
     api.clock.set(addMinutes(TEST_NOW, 88));
     await client.get('/api/calendars').expect(401);
+  });
+});
+
+describe('an elder’s PIN on a helper’s device', () => {
+  it('stands instead of a witness, for any member who reviews; the records say so', async () => {
+    const village = await openVillage(api);
+    const calendar = await beginCalendar(village);
+    const entry = await addEntry(village.officer, calendar.id);
+    const path = `${versionPath(await submit(village.officer, calendar.id))}/entries/${entry.id}/answer`;
+    await cardInUse();
+    const word = says({ onBehalfOf: elder.personId, witness: null });
+    await village.officer.put(path, word).expect(422);
+    await village.elder3.put(path, { ...word, witness: 'Tirel' }).expect(403);
+    const wrong = (await village.elder3.put(path, { ...word, pin: WRONG }).expect(422)).body as Problem;
+    expect(wrong.errors?.map(({ field, code }) => [field, code])).toEqual([['pin', 'pin-wrong']]);
+    const answer = (await village.elder3.put(path, { ...word, pin: PIN }).expect(200)).body as Answer;
+    expect(answer).toMatchObject({ elderId: elder.personId, witness: null });
+    expect(answer.recordedByName).not.toBeNull();
+    const audit = await steward.get(`/api/communities/${steward.communityId}/audit`).expect(200);
+    const [last] = (audit.body as { items: AuditEvent[] }).items;
+    expect(last).toMatchObject({ action: 'answered-on-behalf', details: { proof: 'pin' } });
+  });
+
+  it('is guessed no longer than at the door: the tries count on the same card', async () => {
+    const village = await openVillage(api);
+    const calendar = await beginCalendar(village);
+    const entry = await addEntry(village.officer, calendar.id);
+    const path = `${versionPath(await submit(village.officer, calendar.id))}/entries/${entry.id}/answer`;
+    const { code } = await cardInUse();
+    const word = says({ onBehalfOf: elder.personId, witness: null });
+    for (let tries = 0; tries < 5; tries += 1) {
+      await village.officer.put(path, { ...word, pin: WRONG }).expect(422);
+    }
+    await village.officer.put(path, { ...word, pin: PIN }).expect(429);
+    expect(await tryPin(code, PIN)).toEqual([429, 'card-locked']);
   });
 });
 

@@ -19,6 +19,7 @@ describe('GET /api/session', () => {
     expect(visitor.session).toEqual({
       person: null,
       memberships: null,
+      card: null,
       csrfToken: expect.any(String) as string,
     });
   });

@@ -78,8 +78,8 @@ export class CardSignInService {
       });
       return card?.pinHash ? tryPin(manager, card, pin, this.clock.now()) : 'no-pin';
     });
-    if (outcome === 'no-pin') throw invalidField('proof', 'no-pin');
-    if (outcome === 'wrong') throw invalidField('proof', 'pin-wrong');
+    if (outcome === 'no-pin') throw invalidField('pin', 'no-pin');
+    if (outcome === 'wrong') throw invalidField('pin', 'pin-wrong');
     settled(outcome);
   }
 

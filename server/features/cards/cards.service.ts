@@ -65,7 +65,7 @@ export class CardsService {
   }
 
   async end(actor: Actor, personId: string): Promise<void> {
-    if (personId !== actor.person.id && !hasRole(actor, 'steward')) throw new AppError('not-allowed');
+    if (personId !== actor.person.id && !hasRole(actor, 'steward')) throw conflict('card-not-yours');
     await inTransaction(this.dataSource, async (manager) => {
       const membership = await this.lockedMembership(manager, actor, personId);
       const ending = { at: this.clock.now(), actorId: actor.person.id, why: 'revoked' as const };

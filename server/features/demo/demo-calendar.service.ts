@@ -10,6 +10,7 @@ import type { Clock } from '../../http/context.js';
 import { CalendarsService } from '../calendars/calendars.service.js';
 import { EntriesService } from '../calendars/entries.service.js';
 import { SkyDatesService } from '../calendars/sky-dates.service.js';
+import { CardSignInService } from '../cards/card-sign-in.service.js';
 import { AnswersService } from '../reviews/answers.service.js';
 import { SigningService } from '../reviews/signing.service.js';
 import { FrozenContentService } from '../versions/frozen-content.service.js';
@@ -100,7 +101,7 @@ class DemoRound {
     this.entries = new EntriesService(dataSource, playClock, sky);
     this.variants = new VariantsService(dataSource, playClock, sky);
     this.publishing = new PublishingService(dataSource, playClock, contents, versions);
-    this.answers = new AnswersService(dataSource, playClock);
+    this.answers = new AnswersService(dataSource, playClock, new CardSignInService(dataSource, playClock));
     this.signing = new SigningService(dataSource, playClock, versions);
   }
 

@@ -14,6 +14,7 @@ import { AppError, conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
+import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { personNames } from '../people/person-names.service.js';
@@ -42,6 +43,7 @@ export class AnswersService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
+    private readonly pins: Pick<CardSignInService, 'provePin'>,
   ) {}
 
   async list(actor: Actor, calendarId: string, number: number): Promise<AnswerList> {
@@ -84,7 +86,10 @@ export class AnswersService {
     return (await seenOfVersion(manager, viewer, version, header, entries)).entries;
   }
 
-  /** For oneself as an elder, or for an elder before a witness as an officer or steward. */
+  /**
+   * For oneself as an elder; or for an elder: before a witness as an officer or steward, or with the elder's PIN. A PIN
+   * is tried before anything else is done, so that a wrong one is counted.
+   */
   async put(
     actor: Actor,
     calendarId: string,
@@ -94,9 +99,11 @@ export class AnswersService {
   ): Promise<Answer> {
     const elderId = input.onBehalfOf ?? actor.person.id;
     const onBehalf = elderId !== actor.person.id;
-    if (!(onBehalf ? hasRole(actor, 'officer', 'steward') : hasRole(actor, 'elder'))) {
+    const byPin = onBehalf && input.pin !== undefined;
+    if (!byPin && !(onBehalf ? hasRole(actor, 'officer', 'steward') : hasRole(actor, 'elder'))) {
       throw new AppError('not-allowed');
     }
+    if (byPin) await this.pins.provePin(actor.communityId, elderId, input.pin ?? '');
     return this.inReview(actor, calendarId, number, entryId, async (asked) => {
       const { manager } = asked;
       if (onBehalf && !(await elderIdsOf(manager, actor.communityId)).includes(elderId)) {
@@ -116,7 +123,7 @@ export class AnswersService {
         note: input.note,
         letStand: false,
         recordedBy: onBehalf ? actor.person.id : null,
-        witness: onBehalf ? input.witness : null,
+        witness: onBehalf && !byPin ? input.witness : null,
         answeredAt: this.clock.now(),
       });
       await manager.save(AnswerEntity, row, { reload: false });
@@ -124,7 +131,9 @@ export class AnswersService {
         asked,
         actor,
         onBehalf ? 'answered-on-behalf' : 'answered',
-        onBehalf ? { answer: input.answer, elderId } : { answer: input.answer },
+        onBehalf
+          ? { answer: input.answer, elderId, proof: byPin ? 'pin' : 'witness' }
+          : { answer: input.answer },
       );
       return this.describe(manager, actor, row);
     });

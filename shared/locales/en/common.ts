@@ -156,10 +156,10 @@ export const texts = {
   byCard: {
     label: 'Signed in by card',
     who: '{{name}}, by card',
-    leave: 'Leave',
+    leave: 'Sign out',
     unsentTitle: 'A recording is not sent yet',
-    unsent: 'If you leave now, what was recorded here and not sent is gone.',
+    unsent: 'If you sign out now, what was recorded here and not sent is gone.',
     stay: 'Stay here',
-    leaveAll: 'Leave and forget it',
+    leaveAll: 'Sign out and forget it',
   },
 } as const;

@@ -92,6 +92,7 @@ export const texts = {
     'pin-is-chosen': 'This card has its PIN already. Type that one; if it is not yours, tell the steward.',
     'pin-not-chosen': 'This card has no PIN yet. Choose one first.',
     'card-locked': 'Five wrong PINs: the card is locked for a quarter of an hour. Wait, then try again.',
+    'card-not-yours': 'This is somebody else’s card. Only they and the steward can end it.',
     'card-too-weak': 'A card is for elders and observers only. This role signs in with a password.',
     'rule-impossible': 'There are fewer elders in the village than the rule asks for.',
   },

@@ -5,6 +5,14 @@ export const texts = {
   entryOf: 'Entry {{entry}} of {{total}}',
   progress: '{{done}} of {{total}} entries answered; you are at entry {{entry}}',
   progressEnd: '{{done}} of {{total}} entries answered; you are at the end',
+  aloud: {
+    read: 'Read it aloud',
+    stop: 'Stop reading',
+    pace: 'How fast',
+    slow: 'slow',
+    calm: 'calm',
+    plain: 'as spoken',
+  },
   before: 'Entry before',
   next: 'Next entry',
   toEnd: 'To the end',
@@ -56,6 +64,7 @@ export const texts = {
   otherMine: '{{name}} says: not mine to say.',
   otherMineNote: '{{name}} says: not mine to say. “{{note}}”',
   writtenDown: 'Written down by {{recorder}}; {{witness}} was there.',
+  writtenByPin: 'Written down by {{recorder}}; {{name}} typed their PIN for it.',
   silence: 'Saying nothing is not agreeing: an entry without an answer stays open.',
 
   answers: 'Your answer',
@@ -95,6 +104,8 @@ export const texts = {
   whichElder: 'Which elder',
   witness: 'Who was there',
   witnessHint: 'Name somebody who heard it. It counts as an answer, never as a signature.',
+  pin: 'Or the elder’s PIN',
+  pinHint: 'The elder types it here, for this one answer. It then needs no witness.',
   needElder: 'Choose the elder whose words you write down.',
 
   end: {

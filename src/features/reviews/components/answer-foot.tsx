@@ -2,13 +2,14 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Answer, AnswerWord } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
+import { ApiProblem } from '#src/lib/api-problem.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useLetStand, usePutAnswer, useTakeBackAnswer } from '../api/reviews-api.js';
 import { AnswerButtons } from './answer-buttons.js';
-import type { Spokesman } from './for-whom.js';
+import type { Spokesman, SpokesmanProblem } from './for-whom.js';
 import { NotePanel } from './note-panel.js';
 
 interface AnswerFootProps {
@@ -17,8 +18,13 @@ interface AnswerFootProps {
   answer: Answer | null;
   /** Null where the elder answers; else on whose behalf, and before whom. */
   spokesman: (Spokesman & { name: string }) | null;
-  onMissing: (missing: { elder?: string; witness?: string }) => void;
+  onMissing: (missing: SpokesmanProblem) => void;
   onAnswered: () => void;
+}
+
+/** What is said about the elder's PIN, if that was refused. */
+function pinProblem(cause: unknown): string | undefined {
+  return cause instanceof ApiProblem ? cause.errors.find(({ field }) => field === 'pin')?.code : undefined;
 }
 
 /** The four buttons in thumb reach, the note behind them, and what follows an answer. */
@@ -44,7 +50,8 @@ export function AnswerFoot(props: AnswerFootProps) {
   const ready = (): boolean => {
     if (spokesman === null) return true;
     const elder = spokesman.elderId === '' ? t('needElder') : undefined;
-    const witness = spokesman.witness.trim() === '' ? words.field('witness-required') : undefined;
+    const witness =
+      spokesman.witness.trim() === '' && spokesman.pin === '' ? words.field('witness-required') : undefined;
     onMissing({ ...(elder ? { elder } : {}), ...(witness ? { witness } : {}) });
     return elder === undefined && witness === undefined;
   };
@@ -57,9 +64,12 @@ export function AnswerFoot(props: AnswerFootProps) {
         note,
         onBehalfOf: spokesman?.elderId ?? null,
         witness: spokesman?.witness.trim() ?? null,
+        ...(spokesman !== null && spokesman.pin !== '' ? { pin: spokesman.pin } : {}),
       });
     } catch (cause) {
-      say(words.problem(cause));
+      const pin = pinProblem(cause);
+      if (pin === undefined) say(words.problem(cause));
+      else onMissing({ pin: words.field(pin) });
       return false;
     }
     setNoteFor(null);

@@ -9,6 +9,7 @@ import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useEntrySentences } from '../model/entry-sentences.js';
 import { EntryDays } from './entry-days.js';
+import { ReadAloud } from './read-aloud.js';
 
 /** One entry as an elder reads it: the village's words first, then when, then everything that belongs to it. */
 export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
@@ -19,6 +20,14 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
   const { content, dates } = entry;
   const say = useEntrySentences(entry, header.markers, header.year);
   const { window } = dates;
+  const bestKey = window !== null && window.bestFrom === window.bestTo ? 'bestOneDay' : 'best';
+  const best =
+    window === null
+      ? t('noWindow')
+      : t(bestKey, {
+          day: words.day(window.bestFrom),
+          range: words.range(window.bestFrom, window.bestTo),
+        }).replace(/<\/?d>/gu, '');
   return (
     <div className="review-entry">
       <div className="flex items-center gap-4">
@@ -37,6 +46,17 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
       <p>
         <KeptChip level={content.sharingLevel} details={content.sharing} />
       </p>
+      <ReadAloud
+        language={header.officerLanguage.tag}
+        sentences={[content.titleOfficer, best, say.lead, say.begins, say.lastAdvised]
+          .concat(content.protectiveWatch ? t('watch') : null)
+          .concat(
+            spoken(t('signs'), content.otherSigns),
+            spoken(t('ifLate'), content.ifLate),
+            content.caution,
+          )
+          .filter((sentence): sentence is string => sentence !== null && sentence !== '')}
+      />
       <p className="review-best">
         {window === null ? (
           t('noWindow')
@@ -88,6 +108,10 @@ export function EntryView({ entry, header }: { entry: VersionEntryBody; header: 
       </p>
     </div>
   );
+}
+
+function spoken(title: string, text: string): string {
+  return text === '' ? '' : `${title}: ${text}`;
 }
 
 function Part({ title, text }: { title: string; text: string }) {

@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next';
+import { PIN_MAX } from '#shared/contracts/cards.js';
 import type { ElderProgress } from '#shared/contracts/reviews.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -7,6 +8,14 @@ import { Board } from '#src/ui/surfaces.js';
 export interface Spokesman {
   elderId: string;
   witness: string;
+  /** Typed by the elder for one answer; forgotten with it. */
+  pin: string;
+}
+
+export interface SpokesmanProblem {
+  elder?: string | undefined;
+  witness?: string | undefined;
+  pin?: string | undefined;
 }
 
 export function ForWhom({
@@ -18,7 +27,7 @@ export function ForWhom({
   elders: readonly ElderProgress[];
   value: Spokesman;
   onChange: (value: Spokesman) => void;
-  problem: { elder?: string | undefined; witness?: string | undefined };
+  problem: SpokesmanProblem;
 }) {
   const { t } = useTranslation('reviews');
   return (
@@ -49,6 +58,19 @@ export function ForWhom({
           maxLength={120}
           onChange={(event) => {
             onChange({ ...value, witness: event.currentTarget.value });
+          }}
+        />
+        <TextField
+          label={t('pin')}
+          hint={t('pinHint')}
+          type="password"
+          inputMode="numeric"
+          autoComplete="off"
+          value={value.pin}
+          problem={problem.pin}
+          maxLength={PIN_MAX}
+          onChange={(event) => {
+            onChange({ ...value, pin: event.currentTarget.value.replace(/\D/gu, '') });
           }}
         />
       </div>

@@ -48,7 +48,9 @@ export function AnswerSentence({ answer }: { answer: Answer }) {
       {t(answer.note === '' ? plain : withNote, { name: answer.elderName, note: answer.note })}
       {answer.recordedByName !== null && (
         <span className="block text-umber-soft text-small">
-          {t('writtenDown', { recorder: answer.recordedByName, witness: answer.witness ?? '' })}
+          {answer.witness === null
+            ? t('writtenByPin', { recorder: answer.recordedByName, name: answer.elderName })
+            : t('writtenDown', { recorder: answer.recordedByName, witness: answer.witness })}
         </span>
       )}
     </>

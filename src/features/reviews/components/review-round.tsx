@@ -13,7 +13,7 @@ import { Page } from '#src/ui/page.js';
 import { answersOf, nextOpen } from '../model/answers-of.js';
 import { AnswerFoot } from './answer-foot.js';
 import { EntryView } from './entry-view.js';
-import { ForWhom, type Spokesman } from './for-whom.js';
+import { ForWhom, type Spokesman, type SpokesmanProblem } from './for-whom.js';
 import { OthersWords } from './others-words.js';
 import { ReviewEnd } from './review-end.js';
 
@@ -35,8 +35,8 @@ export function ReviewRound({
   const { t } = useTranslation('reviews');
   const { is } = useRoles();
   const me = useSession().person?.id ?? '';
-  const [spokesman, setSpokesman] = useState<Spokesman>({ elderId: '', witness: '' });
-  const [missing, setMissing] = useState<{ elder?: string | undefined; witness?: string | undefined }>({});
+  const [spokesman, setSpokesman] = useState<Spokesman>({ elderId: '', witness: '', pin: '' });
+  const [missing, setMissing] = useState<SpokesmanProblem>({});
   const speaksForSelf = is('elder');
   const elderId = speaksForSelf ? me : spokesman.elderId;
   const elderName = answers.progress.find((each) => each.elderId === elderId)?.elderName ?? '';
@@ -135,6 +135,7 @@ export function ReviewRound({
             spokesman={speaksForSelf ? null : { ...spokesman, name: elderName }}
             onMissing={setMissing}
             onAnswered={() => {
+              setSpokesman({ ...spokesman, pin: '' });
               const after = new Map(given).set(entry.entryId, null as never);
               goTo(nextOpen(entryIds, after, index) ?? entries.length);
             }}
