@@ -51,6 +51,9 @@ import { lookRoutes } from './features/look/look.routes.js';
 import { LookService } from './features/look/look.service.js';
 import { placesRoutes } from './features/places/places.routes.js';
 import { PlacesService } from './features/places/places.service.js';
+import { LeavingService } from './features/privacy/leaving.service.js';
+import { OwnDataService } from './features/privacy/own-data.service.js';
+import { privacyRoutes } from './features/privacy/privacy.routes.js';
 import { DevicesService } from './features/session/devices.service.js';
 import { createPassport } from './features/session/passport.js';
 import { sessionRoutes } from './features/session/session.routes.js';
@@ -231,6 +234,12 @@ export function createApp(options: AppOptions): App {
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
   withdrawalsRoutes(mount, withdrawals, new ItemStatesService(dataSource, clock));
+  const operator = { hosting: config.hosting, sendsLetters: options.mailer !== null };
+  privacyRoutes(
+    mount,
+    new OwnDataService(dataSource, clock, operator),
+    new LeavingService(dataSource, clock, withdrawals),
+  );
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
   consentsRoutes(mount, consents, new ConsentCardService(dataSource, consents));
   auditRoutes(mount, new AuditListService(dataSource, clock));

@@ -23,6 +23,8 @@ export interface Config {
   readonly sessionSecret: string;
   /** A session that a card opened ends after so many minutes without use: the phone may be a shared one. */
   readonly cardSessionMinutes: number;
+  /** Where the machine stands, in words for everybody, e.g. a country; null where nothing is said. */
+  readonly hosting: string | null;
   readonly logLevel: LogLevel;
   /** True where the demo villages and their accounts are to be made. Never true in production. */
   readonly demo: boolean;
@@ -95,6 +97,7 @@ const variables = z.object({
     'is missing: start with `npm start`, which makes one, or set the password of DB_USER',
   ),
   DATA_DIR: z.string().default('data'),
+  HOSTING: z.string().trim().max(200, 'must be a few words, such as a country').optional(),
   SCAN_COMMAND: z.string().max(500, 'must be a program with its arguments').optional(),
   PUBLIC_URL: z
     .url({ protocol: /^https?$/, error: 'must be a whole address, such as https://calendar.example.org' })
@@ -174,6 +177,7 @@ export function parseConfig(values: Readonly<Record<string, string | undefined>>
     trustProxy: env.TRUST_PROXY,
     sessionSecret: env.SESSION_SECRET,
     cardSessionMinutes: env.CARD_SESSION_MINUTES,
+    hosting: env.HOSTING ?? null,
     logLevel: env.LOG_LEVEL,
     demo,
     mail: Object.freeze({

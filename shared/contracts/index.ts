@@ -15,6 +15,7 @@ import { lettersEndpoints } from './letters.js';
 import { notesEndpoints } from './notes.js';
 import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
+import { privacyEndpoints } from './privacy.js';
 import { reviewsEndpoints } from './reviews.js';
 import { sessionEndpoints } from './session.js';
 import { sharingEndpoints } from './sharing.js';
@@ -30,6 +31,7 @@ import { versionsEndpoints } from './versions.js';
 export const ENDPOINTS: readonly Endpoint[] = [
   healthEndpoints,
   sessionEndpoints,
+  privacyEndpoints,
   cardsEndpoints,
   lettersEndpoints,
   peopleEndpoints,

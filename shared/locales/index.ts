@@ -16,6 +16,7 @@ import { texts as notes } from './en/notes.js';
 import { texts as people } from './en/people.js';
 import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
+import { texts as privacy } from './en/privacy.js';
 import { texts as problems } from './en/problems.js';
 import { texts as reviews } from './en/reviews.js';
 import { texts as session } from './en/session.js';
@@ -56,6 +57,7 @@ export const en = {
   attachments,
   audit,
   print,
+  privacy,
   problems,
   sky,
   today,

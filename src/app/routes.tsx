@@ -17,6 +17,7 @@ export const doorRoutes: readonly AppRoute[] = [
   { path: PATTERNS.signIn, texts: ['session'], load: () => import('./routes/sign-in.js') },
   { path: PATTERNS.card, texts: ['cards', 'session'], load: () => import('./routes/card.js') },
   { path: PATTERNS.reset, texts: ['session', 'letters'], load: () => import('./routes/reset.js') },
+  { path: PATTERNS.privacy, texts: ['privacy'], load: () => import('./routes/privacy.js') },
   { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
 ];
 
@@ -24,7 +25,7 @@ export const doorRoutes: readonly AppRoute[] = [
 export const personRoutes: readonly AppRoute[] = [
   {
     path: PATTERNS.account,
-    texts: ['session', 'letters', 'withdrawals'],
+    texts: ['session', 'letters', 'withdrawals', 'privacy'],
     load: () => import('./routes/account.js'),
   },
 ];

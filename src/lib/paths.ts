@@ -9,6 +9,7 @@ export const PATTERNS = {
   welcome: '/welcome',
   reset: '/reset',
   account: '/account',
+  privacy: '/privacy',
   stars: '/stars',
   moons: '/stars/moons',
   star: '/stars/:markerKey',
@@ -80,6 +81,7 @@ export const paths = {
   card: () => PATTERNS.card,
   reset: () => PATTERNS.reset,
   account: () => PATTERNS.account,
+  privacy: () => PATTERNS.privacy,
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
   moons: (query: { year?: number } = {}) => withQuery(PATTERNS.moons, query),
   star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>

@@ -206,6 +206,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
       token: `${village.personId}.${'0'.repeat(64)}`,
       newPassword: 'never comes to be',
     }),
+    leaveForGood: () => ({ password: 'not mine', takeBackGiven: false }),
     askForResetLetter: () => ({ email: 'a@example.org' }),
     saveLetterChoice: () => ({
       channel: 'none',

@@ -21,10 +21,12 @@ interface AccountPageProps {
   letters?: ReactNode;
   /** What the person may bring back. */
   hidden?: ReactNode;
+  /** What is kept about them, and the way out. */
+  ownData?: ReactNode;
 }
 
 /** The person and their device: village on screen, look, password, sign out. */
-export function AccountPage({ letters, hidden }: AccountPageProps) {
+export function AccountPage({ letters, hidden, ownData }: AccountPageProps) {
   const { t } = useTranslation(['session', 'common']);
   const { person, card } = useSession();
   const words = useProblemWords();
@@ -41,6 +43,7 @@ export function AccountPage({ letters, hidden }: AccountPageProps) {
           <Board title={t('account.screen')}>
             <ThemePick />
           </Board>
+          {ownData}
         </div>
         <div className="grid gap-4">
           {card === null && (

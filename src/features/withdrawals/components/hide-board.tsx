@@ -9,7 +9,7 @@ import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { usePause, useResume, type Item } from '../api/withdrawals-api.js';
 import { ForWhom } from './for-whom.js';
-import { SureButton } from './sure-button.js';
+import { SureButton } from '#src/lib/sure-button.js';
 
 /** Hides a thing from everybody, or brings it back as it was. */
 export function HideBoard({ item, state }: { item: Item; state: ItemState }) {

@@ -3,7 +3,7 @@ import { useTranslation } from 'react-i18next';
 import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useTakeNameOff, type Item } from '../api/withdrawals-api.js';
-import { SureButton } from './sure-button.js';
+import { SureButton } from '#src/lib/sure-button.js';
 
 /** The thing stays, its giver is named no more. */
 export function NameBoard({ item }: { item: Item }) {

@@ -9,7 +9,7 @@ import { ButtonLink } from '#src/ui/button.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { sheetsToReplaceQuery, useSheetReplaced } from '../api/withdrawals-api.js';
-import { SureButton } from './sure-button.js';
+import { SureButton } from '#src/lib/sure-button.js';
 
 /** For whoever prints: a sheet hangs that holds something taken back. It says which sheet, never what was on it. */
 export function SheetsToReplaceBoard() {

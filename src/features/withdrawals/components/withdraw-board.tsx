@@ -6,7 +6,7 @@ import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useWithdraw, type Item } from '../api/withdrawals-api.js';
 import { ForWhom } from './for-whom.js';
-import { SureButton } from './sure-button.js';
+import { SureButton } from '#src/lib/sure-button.js';
 
 interface WithdrawBoardProps {
   item: Item;

@@ -1,6 +1,6 @@
 import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
-import { useProblemWords } from '#src/lib/problem-words.js';
+import { useProblemWords } from './problem-words.js';
 import { Button, type ButtonLook } from '#src/ui/button.js';
 import { Dialog } from '#src/ui/dialog.js';
 import { TickField } from '#src/ui/field.js';

@@ -1,0 +1,57 @@
+import type { Purpose } from '#shared/contracts/privacy.js';
+
+/** A table, why it is there, and where it names people. */
+export interface Held {
+  purpose: Purpose;
+  /** Columns that hold a person's id. */
+  people: readonly string[];
+  /** What of the person's own rows is theirs to have: all columns, or their names. */
+  own: 'all' | readonly string[];
+  /** Secrets, which open something and tell nothing. */
+  secret?: readonly string[];
+}
+
+const row = (
+  purpose: Purpose,
+  people: readonly string[],
+  own: Held['own'],
+  secret: readonly string[] = [],
+): Held => ({
+  ...{ purpose, people, own, secret },
+});
+
+/**
+ * Every table of the product. What belongs to the village is named by its id alone: whoever may see it sees it there.
+ * A new table joins, or a test says so.
+ */
+export const HELD: Readonly<Record<string, Held>> = {
+  person: row('account', ['id'], 'all', ['password_hash']),
+  membership: row('membership', ['person_id'], 'all'),
+  community: row('membership', [], []),
+  village_group: row('membership', [], []),
+  group_member: row('membership', ['person_id'], 'all'),
+  session: row('signing-in', ['person_id'], ['expires_at', 'card_id']),
+  one_time_code: row('signing-in', ['person_id'], 'all', ['code_hash']),
+  sign_in_card: row('signing-in', ['person_id', 'made_by', 'live_for'], ['id', 'community_id', 'made_by']),
+  letter: row('letters', ['person_id'], ['id', 'created_at']),
+  letter_choice: row('letters', ['person_id'], 'all'),
+  place: row('places', [], []),
+  calendar: row('knowledge', [], []),
+  calendar_version: row('knowledge', ['submitted_by'], ['id', 'calendar_id']),
+  draft_contribution: row('knowledge', ['person_id'], 'all'),
+  entry: row('knowledge', ['updated_by'], ['id', 'calendar_id', 'updated_at']),
+  entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
+  figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
+  item_sharing: row('knowledge', ['giver_id'], 'all'),
+  version_entry: row('knowledge', [], []),
+  version_variant: row('knowledge', [], []),
+  answer: row('review', ['elder_id', 'recorded_by'], ['id', 'entry_id', 'elder_id', 'recorded_by']),
+  signature: row('review', ['person_id'], 'all'),
+  attachment: row('voices', ['added_by'], ['id', 'kind', 'title', 'speaker', 'added_at']),
+  attachment_part: row('voices', [], []),
+  attachment_words: row('voices', ['author_id'], ['id', 'attachment_id', 'language', 'text', 'updated_at']),
+  consent: row('agreement', ['giver_id', 'recorded_by'], ['id', 'item_id', 'giver_id', 'recorded_by']),
+  audit_event: row('records', ['actor_id'], ['id', 'at', 'action', 'subject_type', 'subject_id']),
+  kept_read: row('records', ['person_id'], 'all'),
+  withdrawal: row('taking-back', ['asked_by', 'done_by'], ['id', 'item_type', 'at', 'asked_by', 'done_by']),
+};

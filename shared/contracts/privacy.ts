@@ -1,0 +1,69 @@
+import { z } from 'zod';
+import { instant } from './common.js';
+import { anybody, defineEndpoint, signedIn } from './endpoint.js';
+import { PASSWORD_MAX } from './people.js';
+
+/** Why something about people is kept; every table belongs to one. */
+export const PURPOSES = [
+  'account',
+  'membership',
+  'signing-in',
+  'letters',
+  'places',
+  'knowledge',
+  'review',
+  'voices',
+  'agreement',
+  'records',
+  'taking-back',
+] as const;
+export type Purpose = (typeof PURPOSES)[number];
+
+/** Who stands behind the machine and the post, as the operator said it; null where nothing was said. */
+export const privacy = z.strictObject({
+  purposes: z.array(z.strictObject({ purpose: z.enum(PURPOSES), tables: z.array(z.string()) })),
+  hosting: z.string().nullable(),
+  sendsLetters: z.boolean(),
+});
+export type Privacy = z.infer<typeof privacy>;
+
+/** Everything that the tables hold about one person, table by table; secrets and what belongs to others left out. */
+export const ownData = z.strictObject({
+  exportedAt: instant,
+  tables: z.record(z.string(), z.array(z.record(z.string(), z.unknown()))),
+});
+export type OwnData = z.infer<typeof ownData>;
+
+export const leavingInput = z.strictObject({
+  password: z.string().min(1, 'required').max(PASSWORD_MAX, 'too-long'),
+  /** Whether everything that the person gave goes with them; otherwise it stays, without their name. */
+  takeBackGiven: z.boolean(),
+});
+export type LeavingInput = z.infer<typeof leavingInput>;
+
+export const privacyEndpoints = {
+  read: defineEndpoint({
+    id: 'readPrivacy',
+    method: 'GET',
+    path: '/api/privacy',
+    summary: 'What is kept about people and why, where, and who else is involved',
+    access: anybody,
+    response: privacy,
+  }),
+  exportOwn: defineEndpoint({
+    id: 'exportOwnData',
+    method: 'GET',
+    path: '/api/privacy/own-data',
+    summary: 'Everything that is kept about the person who asks',
+    access: signedIn,
+    response: ownData,
+  }),
+  leave: defineEndpoint({
+    id: 'leaveForGood',
+    method: 'POST',
+    path: '/api/privacy/leaving',
+    summary: 'Leave every village for good: name, address, letters and ways in are erased',
+    access: signedIn,
+    body: leavingInput,
+  }),
+} as const;

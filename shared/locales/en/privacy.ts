@@ -1,0 +1,92 @@
+import type { Purpose } from '../../contracts/privacy.js';
+
+const purposes = {
+  account: [
+    'Account',
+    'Name, e-mail address and a hash of the password, so that each person is known as themselves.',
+    'Until the person leaves.',
+  ],
+  membership: [
+    'Villages',
+    'Who belongs to which village and group, and in which role.',
+    'Until the membership ends.',
+  ],
+  'signing-in': [
+    'Signing in',
+    'Where a person is signed in, codes and cards to come in with.',
+    'Sessions for fourteen days without use; codes for a month after their time.',
+  ],
+  letters: [
+    'Letters',
+    'Which letters were sent and how a person wants to be asked. Letters tell no content.',
+    'Four hundred days.',
+  ],
+  places: [
+    'Places',
+    'Where the village watches the sky, with its skyline and air.',
+    'As long as the village uses the product.',
+  ],
+  knowledge: [
+    'Calendar and figures',
+    'What people gave, who gave it, and who may see it. It may tell what people believe.',
+    'Until it is taken back.',
+  ],
+  review: [
+    'Review',
+    'What elders answered and signed.',
+    'As long as the version; with what was taken back it goes.',
+  ],
+  voices: [
+    'Voices and pictures',
+    'Recordings with their spoken agreement, pictures, and written-out words.',
+    'Until they are taken back.',
+  ],
+  agreement: [
+    'Agreements',
+    'What each giver agreed to, and who wrote it down.',
+    'As long as what it is about.',
+  ],
+  records: [
+    'Records',
+    'Who did what and when, and who read what is kept; no content.',
+    'As long as the village uses the product.',
+  ],
+  'taking-back': [
+    'Taking back',
+    'That something was taken back, when and by whom; nothing of what it was.',
+    'As long as old copies of the tables could bring it back.',
+  ],
+} as const satisfies Record<Purpose, readonly [string, string, string]>;
+
+/** English words of data protection: what is kept and why, taking one's data along, leaving. */
+export const texts = {
+  title: 'What we keep and why',
+  lead: 'Everything is kept on the machine that serves this page. Nobody follows you about: no trackers, nothing from elsewhere, nothing sold or handed on.',
+  purpose: Object.fromEntries(
+    Object.entries(purposes).map(([key, [name, what, until]]) => [key, { name, what, until }]),
+  ) as Record<Purpose, { name: string; what: string; until: string }>,
+  who: 'Who sees it: people of the village as far as the level of each thing allows. Whoever runs the machine can reach its tables, and no role of the product reaches past the levels.',
+  hosting: 'The machine stands in: {{where}}.',
+  hostingUnknown: 'Ask whoever runs it where the machine stands.',
+  post: 'Letters go through the mail server that whoever runs it has set; it sees addresses and links.',
+  noPost: 'No letters are sent.',
+
+  own: 'Your data',
+  ownLead: 'You can take along everything that is kept about you, and leave for good.',
+  link: 'What we keep and why',
+  download: 'Download what is kept about me',
+  leave: 'Leave for good',
+  leaveTitle: 'Leave every village for good?',
+  leaveWhat:
+    'Your name and address, letters and ways to sign in are erased. What you signed says “somebody who left”.',
+  given: 'What you gave',
+  gives: {
+    stays: { name: 'It stays', note: 'Where your name was written into a text, take it off there first.' },
+    goes: { name: 'It goes with me', note: 'Everything you gave is taken back for good, without a trace.' },
+  },
+  password: 'Your password',
+  tick: 'I know that this cannot be undone.',
+  tickFirst: 'Tick the line above first.',
+  yes: 'Yes, leave for good',
+  somebodyWhoLeft: 'Somebody who left',
+} as const;

@@ -1,0 +1,1 @@
+export { PrivacyPage as Component } from '#src/features/privacy/components/privacy-page.js';
