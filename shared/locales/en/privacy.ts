@@ -1,70 +1,64 @@
-import type { Purpose } from '../../contracts/privacy.js';
-
-const purposes = {
-  account: [
-    'Account',
-    'Name, e-mail address and a hash of the password, so that each person is known as themselves.',
-    'Until the person leaves.',
-  ],
-  membership: [
-    'Villages',
-    'Who belongs to which village and group, and in which role.',
-    'Until the membership ends.',
-  ],
-  'signing-in': [
-    'Signing in',
-    'Where a person is signed in, codes and cards to come in with.',
-    'Sessions for fourteen days without use; codes for a month after their time.',
-  ],
-  letters: [
-    'Letters',
-    'Which letters were sent and how a person wants to be asked. Letters tell no content.',
-    'Four hundred days.',
-  ],
-  places: [
-    'Places',
-    'Where the village watches the sky, with its skyline and air.',
-    'As long as the village uses the product.',
-  ],
-  knowledge: [
-    'Calendar and figures',
-    'What people gave, who gave it, and who may see it. It may tell what people believe.',
-    'Until it is taken back.',
-  ],
-  review: [
-    'Review',
-    'What elders answered and signed.',
-    'As long as the version; with what was taken back it goes.',
-  ],
-  voices: [
-    'Voices and pictures',
-    'Recordings with their spoken agreement, pictures, and written-out words.',
-    'Until they are taken back.',
-  ],
-  agreement: [
-    'Agreements',
-    'What each giver agreed to, and who wrote it down.',
-    'As long as what it is about.',
-  ],
-  records: [
-    'Records',
-    'Who did what and when, and who read what is kept; no content.',
-    'As long as the village uses the product.',
-  ],
-  'taking-back': [
-    'Taking back',
-    'That something was taken back, when and by whom; nothing of what it was.',
-    'As long as old copies of the tables could bring it back.',
-  ],
-} as const satisfies Record<Purpose, readonly [string, string, string]>;
-
 /** English words of data protection: what is kept and why, taking one's data along, leaving. */
 export const texts = {
   title: 'What we keep and why',
   lead: 'Everything is kept on the machine that serves this page. Nobody follows you about: no trackers, nothing from elsewhere, nothing sold or handed on.',
-  purpose: Object.fromEntries(
-    Object.entries(purposes).map(([key, [name, what, until]]) => [key, { name, what, until }]),
-  ) as Record<Purpose, { name: string; what: string; until: string }>,
+  purpose: {
+    account: {
+      name: 'Account',
+      what: 'Name, e-mail address and a hash of the password, so that each person is known as themselves.',
+      until: 'Until the person leaves.',
+    },
+    membership: {
+      name: 'Villages',
+      what: 'Who belongs to which village and group, and in which role.',
+      until: 'Until the membership ends.',
+    },
+    'signing-in': {
+      name: 'Signing in',
+      what: 'Where a person is signed in, codes and cards to come in with.',
+      until: 'Sessions for fourteen days without use; codes for a month after their time.',
+    },
+    letters: {
+      name: 'Letters',
+      what: 'Which letters were sent and how a person wants to be asked. Letters tell no content.',
+      until: 'Four hundred days.',
+    },
+    places: {
+      name: 'Places',
+      what: 'Where the village watches the sky, with its skyline and air.',
+      until: 'As long as the village uses the product.',
+    },
+    knowledge: {
+      name: 'Calendar and figures',
+      what: 'What people gave, who gave it, and who may see it. It may tell what people believe.',
+      until: 'Until it is taken back.',
+    },
+    review: {
+      name: 'Review',
+      what: 'What elders answered and signed.',
+      until: 'As long as the version; with what was taken back it goes.',
+    },
+    voices: {
+      name: 'Voices and pictures',
+      what: 'Recordings with their spoken agreement, pictures, and written-out words.',
+      until: 'Until they are taken back.',
+    },
+    agreement: {
+      name: 'Agreements',
+      what: 'What each giver agreed to, and who wrote it down.',
+      until: 'As long as what it is about.',
+    },
+    records: {
+      name: 'Records',
+      what: 'Who did what and when, and who read what is kept; no content.',
+      until: 'As long as the village uses the product.',
+    },
+    'taking-back': {
+      name: 'Taking back',
+      what: 'That something was taken back, when and by whom; nothing of what it was.',
+      until: 'As long as old copies of the tables could bring it back.',
+    },
+  },
   who: 'Who sees it: people of the village as far as the level of each thing allows. Whoever runs the machine can reach its tables, and no role of the product reaches past the levels.',
   hosting: 'The machine stands in: {{where}}.',
   hostingUnknown: 'Ask whoever runs it where the machine stands.',
