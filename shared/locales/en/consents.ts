@@ -9,6 +9,7 @@ export const texts = {
   forSteward: 'You keep the register. What a kept thing says is for its own people.',
   dueTitle: 'To be asked again',
   restTitle: 'All others',
+  allTitle: 'All of them',
   keptLine: '{{item}} that its people keep',
   line: { until: 'Holds until {{day}}.', reviewBy: 'Ask again by {{day}}.' },
   item: {

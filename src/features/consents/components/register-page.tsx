@@ -19,6 +19,8 @@ export function RegisterPage({ tabs }: { tabs: ReactNode }) {
   const words = useProblemWords();
   const { data, error, isPending, refetch } = useQuery(consentsQuery(communityId));
   const keeps = is('steward', 'officer', 'elder');
+  const due = (data ?? []).filter(({ isDue }) => isDue);
+  const rest = (data ?? []).filter(({ isDue }) => !isDue);
   usePageTitle(t('title'));
   return (
     <Page>
@@ -35,8 +37,8 @@ export function RegisterPage({ tabs }: { tabs: ReactNode }) {
           </EmptyState>
         )}
       </Board>
-      <Lines title={t('dueTitle')} lines={(data ?? []).filter(({ isDue }) => isDue)} />
-      <Lines title={t('restTitle')} lines={(data ?? []).filter(({ isDue }) => !isDue)} />
+      <Lines title={t('dueTitle')} lines={due} />
+      <Lines title={t(due.length === 0 ? 'allTitle' : 'restTitle')} lines={rest} />
     </Page>
   );
 }

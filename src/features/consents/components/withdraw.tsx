@@ -21,6 +21,17 @@ export function Withdraw({ line }: { line: ConsentLine }) {
   const close = () => {
     setAsking(false);
   };
+  const take = async () => {
+    try {
+      await withdraw.mutateAsync(line);
+    } catch {
+      // Said in the dialog.
+      return;
+    }
+    // The button itself is gone by now: there is nothing left to take back.
+    close();
+    say(t('sheet.withdrawn'));
+  };
   return (
     <div>
       <Button
@@ -44,12 +55,7 @@ export function Withdraw({ line }: { line: ConsentLine }) {
             full
             busy={withdraw.isPending}
             onClick={() => {
-              withdraw.mutate(line, {
-                onSuccess: () => {
-                  close();
-                  say(t('sheet.withdrawn'));
-                },
-              });
+              void take();
             }}
           >
             {t('sheet.withdrawDo')}
