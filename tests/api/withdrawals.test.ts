@@ -187,6 +187,9 @@ describe('a withdrawn entry', () => {
         attachmentId: [entry.id],
         part: ['1'],
         withdrawalId: [entry.id],
+        consentId: [entry.id],
+        noteId: [entry.id],
+        cardId: [entry.id],
         variantId: [entry.id],
       },
       queries: {

@@ -46,6 +46,8 @@ export const HELD: Readonly<Record<string, Held>> = {
   version_entry: row('knowledge', [], []),
   version_variant: row('knowledge', [], []),
   answer: row('review', ['elder_id', 'recorded_by'], ['id', 'entry_id', 'elder_id', 'recorded_by']),
+  note: row('review', ['author_id'], ['id', 'text', 'written_at', 'closed_at']),
+  note_answer: row('review', ['author_id'], ['id', 'text', 'written_at']),
   signature: row('review', ['person_id'], 'all'),
   attachment: row('voices', ['added_by'], ['id', 'kind', 'title', 'speaker', 'added_at']),
   attachment_part: row('voices', [], []),

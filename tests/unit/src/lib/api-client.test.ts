@@ -7,7 +7,7 @@ import { ApiProblem } from '#src/lib/api-problem.js';
 import { keepCsrfToken } from '#src/lib/csrf.js';
 
 const COMMUNITY = '0190a3a0-0000-7000-8000-0000000000a1';
-const visitor = { person: null, memberships: null, csrfToken: 'fresh' };
+const visitor = { person: null, memberships: null, card: null, csrfToken: 'fresh' };
 const signIn = { body: { email: 'a@dawnpeg.example', password: 'x' } };
 
 interface Call {

@@ -82,7 +82,7 @@ describe('sending a file', () => {
   });
 
   it('takes a new token once when the one it had has died', async () => {
-    answerWith({ 'GET /api/session': { person: null, memberships: null, csrfToken: 'new' } });
+    answerWith({ 'GET /api/session': { person: null, memberships: null, card: null, csrfToken: 'new' } });
     FakeRequest.outcomes = [await problemOf('csrf-token', 403), KEPT];
     await expect(send()).resolves.toEqual(KEPT.body);
     expect(FakeRequest.sent.map(({ token }) => token)).toEqual(['present', 'new']);

@@ -307,7 +307,9 @@ describe('a sign that was looked up for an entry', () => {
 
 describe('the draft for others', () => {
   it('is read by an elder and closed to an observer', async () => {
-    answerWith(server(draft({})));
+    const saved = draft({});
+    saved.entries = saved.entries.map((entry) => ({ ...entry, mine: false }));
+    answerWith(server(saved));
     const as = (role: 'elder' | 'observer') => ({
       ...OFFICER,
       memberships: [{ communityId: CALENDAR.communityId, communityName: 'Upper Tazimel', roles: [role] }],
