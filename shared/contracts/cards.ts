@@ -4,7 +4,6 @@ import { anybody, defineEndpoint, member } from './endpoint.js';
 import { role } from './people.js';
 import { sessionState } from './session.js';
 
-export const PIN_MIN = 4;
 export const PIN_MAX = 6;
 /** A card nobody has used by then opens nothing: whoever finds it could choose its PIN. */
 export const CARD_FIRST_USE_DAYS = 14;

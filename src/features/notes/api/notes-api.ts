@@ -9,7 +9,7 @@ export interface NotedThing extends NoteSubject {
 
 export function notesQuery({ communityId, ...subject }: NotedThing) {
   return queryOptions({
-    queryKey: ['notes', communityId, subject.subjectType, subject.subjectId],
+    queryKey: ['notes', communityId, subject],
     queryFn: async ({ signal }) =>
       (await callApi(notesEndpoints.list, { params: { communityId }, query: subject, signal })).items,
   });
