@@ -1,4 +1,5 @@
 import { UserRound } from 'lucide-react';
+import { lazy, Suspense } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Navigate, Outlet, useLocation, useMatches } from 'react-router-dom';
 import { CurrentCommunityProvider, useCommunityChoice } from '#src/lib/community.js';
@@ -11,9 +12,11 @@ import { Board } from '#src/ui/surfaces.js';
 import { EmptyState } from '#src/ui/waiting.js';
 import type { RouteHandle } from '../router.js';
 import { Frame } from './frame.js';
-import { CardBar } from './card-bar.js';
 import { Rail } from './rail.js';
 import { useForgetWithdrawn } from './use-forget-withdrawn.js';
+
+/** Only whoever came in by a card fetches it. */
+const CardBar = lazy(async () => ({ default: (await import('./card-bar.js')).CardBar }));
 
 /** Asks a visitor to sign in first; brings everybody else to their screen, inside the rail. */
 export function SignedInLayout() {
@@ -45,7 +48,11 @@ export function SignedInLayout() {
         }
       >
         <Frame rail={hasRail ? <Rail /> : null}>
-          {card !== null && <CardBar />}
+          {card !== null && (
+            <Suspense fallback={null}>
+              <CardBar />
+            </Suspense>
+          )}
           <Outlet />
         </Frame>
       </MastEnd>
