@@ -18,13 +18,8 @@ import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
 import { VariantsService } from '../variants/variants.service.js';
 import { DEMO_DOMAIN, UPPER_TAZIMEL } from './demo-villages.data.js';
-import {
-  SECOND_ROUND,
-  STANDING_DIFFERENCE,
-  TAZIMEL_ENTRIES,
-  VARIANTS,
-  WITHHELD_ENTRY,
-} from './tazimel-entries.data.js';
+import { VARIANTS, WITHHELD_ENTRY } from './tazimel-beside.data.js';
+import { SECOND_ROUND, STANDING_DIFFERENCE, TAZIMEL_ENTRIES } from './tazimel-entries.data.js';
 
 const DEMO_YEAR = 2027;
 const SUBMISSIONS = 2;
