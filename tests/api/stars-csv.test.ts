@@ -60,9 +60,12 @@ describe('the star table as CSV', () => {
     });
   });
 
-  it('carries basis and caution on every line, so that a line copied out alone keeps them', async () => {
+  it('carries basis, a line to cite and caution on every line, so that a line copied out alone keeps them', async () => {
     const lines = read((await download()).text);
     expect(lines.every((line) => line['basis']?.includes('Vogt 1920'))).toBe(true);
+    expect(
+      lines.every((line) => /^Dawnpeg: .* in 2027, computed with: .*Vogt 1920/u.test(line['cite as'] ?? '')),
+    ).toBe(true);
     expect(lines.every((line) => line['caution']?.includes('do not forecast the weather'))).toBe(true);
   });
 

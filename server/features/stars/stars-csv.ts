@@ -72,6 +72,7 @@ function columnsOf(place: Place, { year }: Table): Column[] {
     constant('starsCsv.place', place.name),
     constant('starsCsv.year', year),
     constant('starsCsv.basis', basis(t, place)),
+    constant('starsCsv.cite', `${t('starsCsv.citation', { place: place.name, year })} ${basis(t, place)}`),
     constant('starsCsv.caution', t('caution')),
   ];
 }

@@ -1,6 +1,8 @@
 /** English words of files that leave the house: tables and what stands on printed boards about their making. */
 export const texts = {
   starsCsv: {
+    cite: 'cite as',
+    citation: 'Dawnpeg: first and last days of stars at {{place}} in {{year}}, computed with:',
     fileName: '{{place}} {{year}} stars',
     kind: 'kind',
     kinds: { star: 'star', figure: 'group of stars', 'own-figure': 'the village’s own' },
