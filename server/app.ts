@@ -11,6 +11,7 @@ import { AttachmentReadingService } from './features/attachments/attachment-read
 import { AttachmentWordsService } from './features/attachments/attachment-words.service.js';
 import { attachmentsRoutes } from './features/attachments/attachments.routes.js';
 import { AttachmentsService } from './features/attachments/attachments.service.js';
+import { ProofsService } from './features/attachments/proofs.service.js';
 import { AuditListService } from './features/audit/audit-list.service.js';
 import { auditRoutes } from './features/audit/audit.routes.js';
 import { calendarsRoutes } from './features/calendars/calendars.routes.js';
@@ -213,9 +214,10 @@ export function createApp(options: AppOptions): App {
   notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
-  const answers = new AnswersService(dataSource, clock, cardSignIn);
-  reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
+  const proofs = new ProofsService(attachmentFiles, clock);
+  const answers = new AnswersService(dataSource, clock, cardSignIn, proofs);
+  reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
   const erasers = erasersOf(attachmentFiles, clock);
   const withdrawals = new WithdrawalsService(dataSource, clock, erasers, options.withdrawals);
   attachmentsRoutes(

@@ -14,6 +14,19 @@ export interface Actor {
   person: Person;
   communityId: string;
   roles: readonly Role[];
+  /** Set where somebody else's hand writes for this person. */
+  helper?: Helper;
+}
+
+/** Whose hand it is, and what shows that the person who is helped is there. */
+export interface Helper {
+  id: string;
+  /** The helped person typed their PIN when the helping began: the helper sees what they see. */
+  shownPin: boolean;
+  /** The PIN came once more with this very call. */
+  provedNow: boolean;
+  /** Who looks, where no PIN was shown: the helper themself. */
+  eyes: { personId: string; roles: readonly Role[] } | null;
 }
 
 /** Whose memberships count in this session. */

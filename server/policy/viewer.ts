@@ -19,16 +19,19 @@ export interface Member {
   person: { id: string };
   communityId: string;
   roles: readonly Role[];
+  /** Who writes for somebody else without having been let in by them sees no more than what is theirs to see. */
+  helper?: { eyes: { personId: string; roles: readonly Role[] } | null };
 }
 
 const JD_UNIX_EPOCH = 2440587.5;
 const MS_PER_DAY = 86_400_000;
 
 export async function viewerOf(manager: EntityManager, member: Member, now: Date): Promise<Viewer> {
-  const { communityId, roles, person } = member;
-  const groups = await manager.findBy(GroupMemberEntity, { personId: person.id, group: { communityId } });
+  const { communityId } = member;
+  const { personId, roles } = member.helper?.eyes ?? { personId: member.person.id, roles: member.roles };
+  const groups = await manager.findBy(GroupMemberEntity, { personId, group: { communityId } });
   return {
-    personId: person.id,
+    personId,
     communityId,
     roles,
     groupIds: new Set(groups.map(({ groupId }) => groupId)),

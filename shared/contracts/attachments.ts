@@ -29,7 +29,7 @@ export const ATTACHMENT_KINDS = ['recording', 'picture'] as const;
 export type AttachmentKind = (typeof ATTACHMENT_KINDS)[number];
 
 /** What a recording or a picture belongs to. It is never shown to anybody who may not see that. */
-export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker', 'consent'] as const;
+export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker', 'consent', 'meeting'] as const;
 export type AttachmentSubjectType = (typeof ATTACHMENT_SUBJECTS)[number];
 
 /** Before anybody chooses: what was spoken is for the elders and leaves no trace, what was photographed for the village. */

@@ -1,12 +1,22 @@
 import { z } from 'zod';
 import { pin } from './cards.js';
-import { id, instant, line, listOf, text } from './common.js';
+import { id, instant, isoDate, line, listOf, text } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { signatureRole, submissionNumber, version } from './versions.js';
 
 export const ANSWERS = ['agree', 'change-this', 'not-for-the-board', 'not-mine-to-say'] as const;
 export const answerWord = z.enum(ANSWERS);
 export type AnswerWord = (typeof ANSWERS)[number];
+
+/** A few spoken words. */
+const PROOF_MAX_BYTES = 4 * 1024 * 1024;
+
+/** Why what another hand wrote counts as the elder's word. */
+export const ANSWER_PROOFS = ['witness', 'pin', 'shown-pin', 'voice', 'paper'] as const;
+export type AnswerProofKind = (typeof ANSWER_PROOFS)[number];
+
+/** What was spoken to an answer: to be heard, kept by its people, or gone. */
+export const SPOKEN_STATES = ['kept', 'kept-apart', 'taken-away'] as const;
 
 /** An elder's word on one entry as it was frozen; it follows the content, not the submission. */
 export const answer = z.strictObject({
@@ -21,8 +31,18 @@ export const answer = z.strictObject({
   letStand: z.boolean(),
   /** Set when somebody else wrote the answer down. */
   recordedByName: z.string().nullable(),
-  /** Null with a recorder: the elder proved it with their PIN. */
   witness: z.string().nullable(),
+  /** Null where the elder's own hand gave it. The id is of a recording or a picture that the reader may open. */
+  proof: z
+    .strictObject({
+      kind: z.enum(ANSWER_PROOFS),
+      attachmentId: id.nullable(),
+      /** The day of the meeting. */
+      on: isoDate.nullable(),
+    })
+    .nullable(),
+  /** Null where nothing was spoken to it; the id where the reader may hear it. */
+  spoken: z.strictObject({ state: z.enum(SPOKEN_STATES), attachmentId: id.nullable() }).nullable(),
   answeredAt: instant,
   /** The asking person gave it, or may speak for its elder. */
   mine: z.boolean(),
@@ -38,16 +58,33 @@ export const answerInput = z
     witness: line(120).nullable(),
     /** The elder's own PIN, typed by them on the helper's device: it stands instead of a witness. */
     pin: pin.optional(),
+    /** What the elder said about this entry, recorded and kept: it counts instead of typed words. */
+    recordingId: id.nullable().optional(),
   })
   .superRefine((input, context) => {
     if (input.onBehalfOf !== null && !input.witness && input.pin === undefined) {
       context.addIssue({ code: 'custom', path: ['witness'], message: 'witness-required' });
     }
-    if (input.answer === 'change-this' && input.note.length === 0) {
+    if (input.answer === 'change-this' && input.note.length === 0 && !input.recordingId) {
       context.addIssue({ code: 'custom', path: ['note'], message: 'say-what-to-change' });
     }
   });
 export type AnswerInput = z.infer<typeof answerInput>;
+
+/** Written by another hand; the elder's voice, which comes with it, proves it. */
+export const spokenAnswerInput = z
+  .strictObject({
+    answer: answerWord,
+    note: text(1000),
+    onBehalfOf: id.nullable(),
+    recordingId: id.nullable().optional(),
+  })
+  .superRefine((input, context) => {
+    if (input.answer === 'change-this' && input.note.length === 0 && !input.recordingId) {
+      context.addIssue({ code: 'custom', path: ['note'], message: 'say-what-to-change' });
+    }
+  });
+export type SpokenAnswerInput = z.infer<typeof spokenAnswerInput>;
 
 /** How far each elder of the community is with a submission. */
 export const elderProgress = z.strictObject({
@@ -93,6 +130,18 @@ export const reviewsEndpoints = {
     params: answerParams,
     body: answerInput,
     response: answer,
+  }),
+  putSpokenAnswer: defineEndpoint({
+    id: 'putSpokenAnswer',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/entries/:entryId/answer/spoken',
+    summary: 'Write down an elder’s answer with a clip of their voice that proves it',
+    access: member('calendar', 'officer', 'elder', 'steward'),
+    params: answerParams,
+    body: spokenAnswerInput,
+    upload: { maxBytes: PROOF_MAX_BYTES },
+    response: answer,
+    status: 201,
   }),
   takeBackAnswer: defineEndpoint({
     id: 'takeBackAnswer',

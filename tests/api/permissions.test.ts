@@ -144,6 +144,7 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     'publishVersion',
     'listAnswers',
     'putAnswer',
+    'putSpokenAnswer',
     'takeBackAnswer',
     'letDifferenceStand',
     'signVersion',
@@ -265,6 +266,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     askChanges: () => ({ reason: 'taken-back', note: '' }),
     recallVersion: () => ({ note: 'A wrong date' }),
     putAnswer: () => (speaksForAnElder ? says({ onBehalfOf: village.elderId, witness: 'Tirel' }) : says()),
+    putSpokenAnswer: () => ({ answer: 'agree', note: '', onBehalfOf: village.elderId }),
     signVersion: () => ({ role: role === 'steward' ? 'steward' : 'elder' }),
   };
   const make = bodies[endpoint.id];

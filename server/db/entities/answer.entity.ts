@@ -1,4 +1,4 @@
-import type { AnswerWord } from '#shared/contracts/reviews.js';
+import type { AnswerProofKind, AnswerWord } from '#shared/contracts/reviews.js';
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, Unique, type Relation } from 'typeorm';
 import { CalendarEntity } from './calendar.entity.js';
 import { codeColumn, instantColumn, sha256Column } from './columns.js';
@@ -46,6 +46,18 @@ export class AnswerEntity {
 
   @Column({ type: 'varchar', length: 120, nullable: true })
   witness!: string | null;
+
+  /** What the elder said instead of, or besides, the note. It may be gone since. */
+  @Column({ name: 'recording_id', type: 'uuid', nullable: true })
+  recordingId!: string | null;
+
+  /** Where somebody else's hand wrote it: why it counts as the elder's word. */
+  @Column({ ...codeColumn(16), nullable: true })
+  proof!: AnswerProofKind | null;
+
+  /** The elder's voice, or the meeting whose paper shows it. */
+  @Column({ name: 'proof_id', type: 'uuid', nullable: true })
+  proofId!: string | null;
 
   @Column({ name: 'answered_at', ...instantColumn })
   answeredAt!: Date;

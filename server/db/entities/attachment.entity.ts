@@ -63,6 +63,10 @@ export class AttachmentEntity {
   @Column({ name: 'added_by', type: 'uuid' })
   addedBy!: string;
 
+  /** Whose device it was, where somebody helped; null where it was their own. */
+  @Column({ name: 'typed_by', type: 'uuid', nullable: true })
+  typedBy!: string | null;
+
   @Column({ name: 'added_at', ...instantColumn })
   addedAt!: Date;
 

@@ -23,6 +23,10 @@ export class AuditEventEntity {
   @Column({ name: 'actor_id', type: 'uuid', nullable: true })
   actorId!: string | null;
 
+  /** For whom the actor did it, where it was not for themself. */
+  @Column({ name: 'on_behalf_of', type: 'uuid', nullable: true })
+  onBehalfOf!: string | null;
+
   @Column(codeColumn(40))
   action!: AuditAction;
 

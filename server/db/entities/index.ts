@@ -14,6 +14,7 @@ import { GroupMemberEntity } from './group-member.entity.js';
 import { ItemSharingEntity } from './item-sharing.entity.js';
 import { KeptReadEntity } from './kept-read.entity.js';
 import { LetterChoiceEntity } from './letter-choice.entity.js';
+import { MeetingEntity } from './meeting.entity.js';
 import { LetterEntity } from './letter.entity.js';
 import { MembershipEntity } from './membership.entity.js';
 import { OneTimeCodeEntity } from './one-time-code.entity.js';
@@ -46,6 +47,7 @@ export const ENTITIES = [
   CalendarVersionEntity,
   VersionEntryEntity,
   AnswerEntity,
+  MeetingEntity,
   SignatureEntity,
   AuditEventEntity,
   LetterEntity,

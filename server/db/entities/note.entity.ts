@@ -33,6 +33,10 @@ export class NoteEntity {
   @Column({ name: 'author_id', type: 'uuid' })
   authorId!: string;
 
+  /** Whose hand wrote it down for its author; null where it was their own. */
+  @Column({ name: 'typed_by', type: 'uuid', nullable: true })
+  typedBy!: string | null;
+
   @Column({ name: 'written_at', ...instantColumn })
   writtenAt!: Date;
 

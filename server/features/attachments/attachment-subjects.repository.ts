@@ -46,6 +46,14 @@ const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
     const answer = await manager.findOneBy(AnswerEntity, { id, calendar });
     return answer !== null && looksAtEntry(manager, viewer, answer.entryId);
   },
+  /** The paper of a meeting shows what was said to each of its entries. */
+  meeting: async (manager, viewer, id) => {
+    if (!seesDrafts(viewer)) return false;
+    const calendar = { communityId: viewer.communityId };
+    const answers = await manager.findBy(AnswerEntity, { proof: 'paper', proofId: id, calendar });
+    for (const { entryId } of answers) if (!(await looksAtEntry(manager, viewer, entryId))) return false;
+    return answers.length > 0;
+  },
   marker: async (manager, viewer, key) => resolveMarker(key, await figuresSeenBy(manager, viewer)) !== null,
   /** Proof of a consent is for those who read the consent. */
   consent: readableConsent,

@@ -7,6 +7,8 @@ export interface AuditRecord {
   at: Date;
   communityId: string | null;
   actorId: string | null;
+  /** For whom, where it was not for themself; whoever helps is named by the gate. */
+  onBehalfOf?: string | null;
   action: AuditAction;
   subjectType: AuditEventEntity['subjectType'];
   subjectId: string | null;

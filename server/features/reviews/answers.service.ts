@@ -1,26 +1,40 @@
 import { answeredCount, entryOutcome, type ReviewState } from '#shared/calendar/sign-off.js';
-import type { AuditAction } from '#shared/contracts/audit.js';
-import type { Answer, AnswerInput, ElderProgress, Outcome } from '#shared/contracts/reviews.js';
+import type {
+  Answer,
+  AnswerInput,
+  ElderProgress,
+  Outcome,
+  SpokenAnswerInput,
+} from '#shared/contracts/reviews.js';
 import type { VersionEntry } from '#shared/contracts/versions.js';
-import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
-import { SignatureEntity } from '../../db/entities/signature.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import { hasRole, type Actor } from '../../http/actor.js';
-import { AppError, conflict, notFound } from '../../http/app-error.js';
+import type { Actor } from '../../http/actor.js';
+import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import type { UploadedFile } from '../../http/upload.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
+import type { ProofsService } from '../attachments/proofs.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
-import { recordAudit } from '../audit/audit.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { frozenContent, frozenEntry, visibleVersion } from '../versions/frozen-content.service.js';
 import { readReviewState, reviewedVersion } from '../versions/review-state.service.js';
 import { seenOfVersion, thingOf } from '../versions/seen-content.service.js';
+import { evidenceOf } from './answer-evidence.js';
+import { handOf } from './answer-hand.js';
+import {
+  expectNotOwn,
+  expectUnsigned,
+  findAnswer,
+  recordAnswer,
+  writeAnswer,
+  type Asked,
+} from './answer-writing.js';
 import { toAnswer } from './reviews.mapper.js';
 import { elderIdsOf } from './reviews.repository.js';
 
@@ -31,19 +45,13 @@ export interface AnswerList {
   outcomes: Outcome[];
 }
 
-/** Where an answer belongs. */
-interface Asked {
-  manager: EntityManager;
-  version: CalendarVersionEntity;
-  entry: VersionEntryEntity;
-}
-
 /** Elders' words on entries. They belong to entry and content, and never move the state by themselves. */
 export class AnswersService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly pins: Pick<CardSignInService, 'provePin'>,
+    private readonly proofs: Pick<ProofsService, 'keepWith'>,
   ) {}
 
   async list(actor: Actor, calendarId: string, number: number): Promise<AnswerList> {
@@ -63,8 +71,9 @@ export class AnswersService {
       ...review.signatures.map(({ personId }) => personId),
       ...rows.flatMap(({ elderId, recordedBy }) => [elderId, recordedBy]),
     ]);
+    const evidence = await evidenceOf(manager, await viewerOf(manager, actor, this.clock.now()), rows);
     return {
-      items: rows.map((row) => toAnswer(row, names, actor.person.id)),
+      items: rows.map((row) => toAnswer(row, names, actor.person.id, evidence(row))),
       nextCursor: null,
       outcomes: seen.map(({ entryId, hash, variants = [] }) => ({
         entryId,
@@ -86,10 +95,7 @@ export class AnswersService {
     return (await seenOfVersion(manager, viewer, version, header, entries)).entries;
   }
 
-  /**
-   * For oneself as an elder; or for an elder: before a witness as an officer or steward, or with the elder's PIN. A PIN
-   * is tried before anything else is done, so that a wrong one is counted.
-   */
+  /** A PIN is tried before anything else is done, so that a wrong one is counted. */
   async put(
     actor: Actor,
     calendarId: string,
@@ -97,46 +103,41 @@ export class AnswersService {
     entryId: string,
     input: AnswerInput,
   ): Promise<Answer> {
-    const elderId = input.onBehalfOf ?? actor.person.id;
-    const onBehalf = elderId !== actor.person.id;
-    const byPin = onBehalf && input.pin !== undefined;
-    if (!byPin && !(onBehalf ? hasRole(actor, 'officer', 'steward') : hasRole(actor, 'elder'))) {
-      throw new AppError('not-allowed');
-    }
-    if (byPin) await this.pins.provePin(actor.communityId, elderId, input.pin ?? '');
+    const pin = input.pin ?? null;
+    const hand = handOf(actor, input, { pin: pin !== null, voice: false });
+    if (hand.proof === 'pin') await this.pins.provePin(actor.communityId, hand.elderId, pin ?? '');
     return this.inReview(actor, calendarId, number, entryId, async (asked) => {
-      const { manager } = asked;
-      if (onBehalf && !(await elderIdsOf(manager, actor.communityId)).includes(elderId)) {
-        throw conflict('not-an-elder');
-      }
-      await expectUnsigned(asked, elderId, onBehalf ? 'elder-has-signed' : 'already-signed');
-      const before = await findAnswer(asked, elderId);
-      // What an elder said with their own hand is not written over by somebody else's.
-      if (onBehalf && before?.recordedBy === null) throw conflict('own-answer-stands');
-      const row = manager.create(AnswerEntity, {
-        id: before?.id ?? randomUUID(),
-        calendarId,
-        entryId,
-        entryHash: asked.entry.hash,
-        elderId,
-        answer: input.answer,
-        note: input.note,
-        letStand: false,
-        recordedBy: onBehalf ? actor.person.id : null,
-        witness: onBehalf && !byPin ? input.witness : null,
-        answeredAt: this.clock.now(),
-      });
-      await manager.save(AnswerEntity, row, { reload: false });
-      await this.record(
-        asked,
-        actor,
-        onBehalf ? 'answered-on-behalf' : 'answered',
-        onBehalf
-          ? { answer: input.answer, elderId, proof: byPin ? 'pin' : 'witness' }
-          : { answer: input.answer },
-      );
-      return this.describe(manager, actor, row);
+      const row = await writeAnswer(asked, actor, this.clock.now(), hand, input);
+      return this.describe(asked.manager, actor, row);
     });
+  }
+
+  /** Another hand writes, and the elder's own voice proves it: a clip that is kept with the answer. */
+  async putSpoken(
+    actor: Actor,
+    calendarId: string,
+    number: number,
+    entryId: string,
+    input: SpokenAnswerInput,
+    file: UploadedFile,
+  ): Promise<Answer> {
+    const { communityId } = actor;
+    const hand = handOf(actor, { ...input, witness: null }, { pin: false, voice: true });
+    const { elderId, recordedBy } = hand;
+    if (recordedBy === null) throw conflict('no-proof-needed');
+    // Whoever may not answer here is refused before anything is kept.
+    await this.inReview(actor, calendarId, number, entryId, () => Promise.resolve());
+    return this.proofs.keepWith('recording', file, (attach) =>
+      this.inReview(actor, calendarId, number, entryId, async (asked) => {
+        const { manager } = asked;
+        const speaker = (await personNames(manager, [elderId])).get(elderId) ?? '';
+        const about = { communityId, subjectType: 'answer', speaker, giverId: elderId, addedBy: recordedBy };
+        const row = await writeAnswer(asked, actor, this.clock.now(), hand, input, (answerId) =>
+          attach(manager, { ...about, subjectType: 'answer', subjectId: answerId }),
+        );
+        return this.describe(manager, actor, row);
+      }),
+    );
   }
 
   async takeBack(actor: Actor, calendarId: string, number: number, entryId: string): Promise<void> {
@@ -144,8 +145,9 @@ export class AnswersService {
       const row = await findAnswer(asked, actor.person.id);
       if (row === null) throw notFound();
       await expectUnsigned(asked, actor.person.id, 'already-signed');
+      if (actor.helper !== undefined) expectNotOwn(row);
       await asked.manager.delete(AnswerEntity, { id: row.id });
-      await this.record(asked, actor, 'answer-taken-back', { answer: row.answer });
+      await recordAnswer(asked, actor, this.clock.now(), 'answer-taken-back', { answer: row.answer });
     });
   }
 
@@ -157,7 +159,7 @@ export class AnswersService {
       if (!row.letStand) {
         row.letStand = true;
         await asked.manager.update(AnswerEntity, { id: row.id }, { letStand: true });
-        await this.record(asked, actor, 'difference-let-stand', {});
+        await recordAnswer(asked, actor, this.clock.now(), 'difference-let-stand', {});
       }
       return this.describe(asked.manager, actor, row);
     });
@@ -187,39 +189,10 @@ export class AnswersService {
   }
 
   private async describe(manager: EntityManager, actor: Actor, row: AnswerEntity): Promise<Answer> {
-    return toAnswer(row, await personNames(manager, [row.elderId, row.recordedBy]), actor.person.id);
+    const names = await personNames(manager, [row.elderId, row.recordedBy]);
+    const evidence = await evidenceOf(manager, await viewerOf(manager, actor, this.clock.now()), [row]);
+    return toAnswer(row, names, actor.person.id, evidence(row));
   }
-
-  private async record(
-    { manager, version, entry }: Asked,
-    actor: Actor,
-    action: AuditAction,
-    details: Record<string, unknown>,
-  ): Promise<void> {
-    await recordAudit(manager, {
-      at: this.clock.now(),
-      communityId: actor.communityId,
-      actorId: actor.person.id,
-      action,
-      subjectType: 'entry',
-      subjectId: entry.entryId,
-      details: { calendarId: version.calendarId, number: version.number, ...details },
-    });
-  }
-}
-
-/** A signature says that its elder's answers are given; they stay as they were when it was given. */
-async function expectUnsigned(
-  { manager, version }: Asked,
-  elderId: string,
-  reason: 'already-signed' | 'elder-has-signed',
-): Promise<void> {
-  const signature = { versionId: version.id, personId: elderId, role: 'elder' as const };
-  if (await manager.existsBy(SignatureEntity, signature)) throw conflict(reason);
-}
-
-async function findAnswer({ manager, entry }: Asked, elderId: string): Promise<AnswerEntity | null> {
-  return manager.findOneBy(AnswerEntity, { entryId: entry.entryId, entryHash: entry.hash, elderId });
 }
 
 /** One's own count goes over everything that one sees, also what its people keep. */

@@ -1,7 +1,13 @@
 import type { Answer } from '#shared/contracts/reviews.js';
 import type { AnswerEntity } from '../../db/entities/answer.entity.js';
+import type { Evidence } from './answer-evidence.js';
 
-export function toAnswer(row: AnswerEntity, names: ReadonlyMap<string, string>, askingId: string): Answer {
+export function toAnswer(
+  row: AnswerEntity,
+  names: ReadonlyMap<string, string>,
+  askingId: string,
+  evidence: Evidence,
+): Answer {
   return {
     id: row.id,
     entryId: row.entryId,
@@ -13,6 +19,7 @@ export function toAnswer(row: AnswerEntity, names: ReadonlyMap<string, string>, 
     letStand: row.letStand,
     recordedByName: row.recordedBy === null ? null : (names.get(row.recordedBy) ?? ''),
     witness: row.witness,
+    ...evidence,
     answeredAt: row.answeredAt.toISOString(),
     mine: row.elderId === askingId || row.recordedBy === askingId,
   };

@@ -10,6 +10,9 @@ export function reviewsRoutes(mount: Mount, answers: AnswersService, signing: Si
   mount.forMember(reviewsEndpoints.putAnswer, ({ params, body }, actor) =>
     answers.put(actor, params.calendarId, Number(params.number), params.entryId, body),
   );
+  mount.forMemberUpload(reviewsEndpoints.putSpokenAnswer, ({ params, body }, actor, file) =>
+    answers.putSpoken(actor, params.calendarId, Number(params.number), params.entryId, body, file),
+  );
   mount.forMember(reviewsEndpoints.takeBackAnswer, async ({ params }, actor) => {
     await answers.takeBack(actor, params.calendarId, Number(params.number), params.entryId);
     return undefined;

@@ -36,10 +36,13 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
         'answer',
         answers.map(({ id }) => id),
       );
+      // A paper that shows what is taken back goes with it; the other answers on it keep their words.
+      const papers = answers.flatMap(({ proof, proofId }) => (proof === 'paper' && proofId ? [proofId] : []));
+      const shown = await eraseAttachmentsOf(manager, 'meeting', [...new Set(papers)]);
       const variants = await variantIdsOf(manager, itemId);
       const published = await eraseFrozenEntry(manager, itemId, leavesTrace);
       await eraseDraftEntry(manager, itemId);
-      const { withIt = [], ...rest } = attached(spoken);
+      const { withIt = [], ...rest } = attached(together(spoken, shown));
       const beside = variants.map((id) => ({ itemType: 'variant' as const, itemId: id }));
       return { ...rest, published, withIt: [...withIt, ...beside] };
     }),
@@ -84,6 +87,13 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       return {};
     },
   ];
+}
+
+function together(first: ErasedFiles, second: ErasedFiles): ErasedFiles {
+  return {
+    attachmentIds: [...first.attachmentIds, ...second.attachmentIds],
+    files: [...first.files, ...second.files],
+  };
 }
 
 function only(itemType: SharedItemType, erase: Eraser): Eraser {

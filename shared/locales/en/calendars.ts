@@ -434,6 +434,12 @@ export const texts = {
     notForBoard: '{{name}} says: not for the board. “{{note}}”',
     notForBoardPlain: '{{name}} says: not for the board.',
     recorded: 'Written down by {{recorder}}, with {{witness}} present.',
+    typed: 'Typed by {{recorder}} for {{name}}.',
+    spoken: {
+      kept: 'It was said by voice: listen under “Voices and pictures” of the entry.',
+      'kept-apart': 'It was said by voice, for its own people to hear. Ask them.',
+      'taken-away': 'It was said by voice. The recording was taken away.',
+    },
     changedSince: 'You have changed the entry since. It is asked again with the next submission.',
     changeDays: 'Change the days',
     changeWords: 'Change the words',

@@ -86,6 +86,8 @@ export const texts = {
     'not-yours': 'Only whoever added this can change or remove it.',
     'consent-there': 'This person has been asked about it already. Write the new answer down there.',
     'nothing-to-withdraw': 'Nothing is agreed here that could be taken back.',
+    'proof-needed': 'This needs the elder’s own yes: their PIN, or their voice. Nothing has been kept.',
+    'no-proof-needed': 'You answer for yourself: no proof is needed for that.',
     'needs-password': 'A card is not enough for this. Sign in with your password.',
     'pin-wrong':
       'This is not the PIN of this card. After five wrong ones it is locked for a quarter of an hour.',
@@ -164,7 +166,9 @@ export const texts = {
     'last-date-not-marked': 'Mark the entry as one with a last date, or take the date out.',
     'watch-or-last-date': 'A watch is never shortened: an entry is either a watch or has a last date.',
     'witness-required': 'Name the person who was there when the elder answered.',
-    'say-what-to-change': 'Write what should be different.',
+    'say-what-to-change': 'Say what should be different: write it, or speak it.',
+    'not-your-recording':
+      'This recording was not given by this elder about this entry, or it was taken away.',
     'version-number': 'Write a submission number, or draft.',
     'unknown-place': 'This place does not belong to the village. Choose one of its places.',
     'choose-stars': 'Choose at least one star, or mark a patch of sky instead.',

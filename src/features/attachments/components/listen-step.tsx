@@ -1,6 +1,7 @@
 import { Mic, Send, Trash2 } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
+import type { Attachment } from '#shared/contracts/attachments.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
 import { useToast } from '#src/ui/toast.js';
@@ -12,7 +13,15 @@ import { SendingLine } from './sending-line.js';
 import { keptSources, VoicePlayer } from './voice-player.js';
 
 /** The speaker listens; then it is kept with the village, goes on, or is thrown away. */
-export function ListenStep({ recorder, onDone }: { recorder: Recorder; onDone: () => void }) {
+export function ListenStep({
+  recorder,
+  onDone,
+  onKept,
+}: {
+  recorder: Recorder;
+  onDone: () => void;
+  onKept?: ((attachment: Attachment) => void) | undefined;
+}) {
   const { t } = useTranslation('attachments');
   const say = useToast();
   const lookAgain = useLookAgain();
@@ -25,10 +34,12 @@ export function ListenStep({ recorder, onDone }: { recorder: Recorder; onDone: (
   const spoken = parts.filter(({ part }) => part > 0);
   const keepIt = async () => {
     await recorder.setTitle(title.trim());
-    if ((await sending.send()) === null) return;
+    const kept = await sending.send();
+    if (kept === null) return;
     await lookAgain();
     say(t('sending.done'));
     onDone();
+    onKept?.(kept);
   };
   if (recording === null) return null;
   const isSending = sending.share !== null;

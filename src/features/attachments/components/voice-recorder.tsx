@@ -1,6 +1,6 @@
 import { useEffect, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { AttachmentSubject } from '#shared/contracts/attachments.js';
+import type { Attachment, AttachmentSubject } from '#shared/contracts/attachments.js';
 import { useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
@@ -18,6 +18,8 @@ interface VoiceRecorderProps {
   found: Unsent | null;
   /** Sent, thrown away, or left for later. */
   onDone: () => void;
+  /** It is with the village now. */
+  onKept?: ((attachment: Attachment) => void) | undefined;
 }
 
 const TITLES = {
@@ -28,7 +30,7 @@ const TITLES = {
 } as const satisfies Record<RecorderStep, string>;
 
 /** Who speaks – the agreement – record – stop – listen – keep. One step at a time. */
-export function VoiceRecorder({ communityId, subject, found, onDone }: VoiceRecorderProps) {
+export function VoiceRecorder({ communityId, subject, found, onDone, onKept }: VoiceRecorderProps) {
   const { t } = useTranslation(['attachments', 'common']);
   const personId = useSession().person?.id ?? '';
   const recorder = useRecorder({ ...subject, communityId, personId, found });
@@ -52,7 +54,7 @@ export function VoiceRecorder({ communityId, subject, found, onDone }: VoiceReco
           {step === 'voice' && <VoiceStep recorder={recorder} />}
         </>
       )}
-      {step === 'listen' && <ListenStep recorder={recorder} onDone={onDone} />}
+      {step === 'listen' && <ListenStep recorder={recorder} onDone={onDone} onKept={onKept} />}
       {isReady && (
         <div className="flex flex-wrap justify-between gap-2">
           <Button look="quiet" onClick={onDone}>

@@ -11,8 +11,8 @@ export interface Unsent {
 export function useKeptRecordings(
   personId: string,
   { subjectType, subjectId }: AttachmentSubject,
-): { unsent: readonly Unsent[]; lookAgain: () => Promise<void> } {
-  const [unsent, setUnsent] = useState<readonly Unsent[]>([]);
+): { unsent: readonly Unsent[]; isKnown: boolean; lookAgain: () => Promise<void> } {
+  const [found, setFound] = useState<readonly Unsent[] | null>(null);
   const read = useCallback(async (): Promise<Unsent[]> => {
     try {
       const found: Unsent[] = [];
@@ -25,16 +25,16 @@ export function useKeptRecordings(
     }
   }, [personId, subjectType, subjectId]);
   const lookAgain = useCallback(async () => {
-    setUnsent(await read());
+    setFound(await read());
   }, [read]);
   useEffect(() => {
     let isHere = true;
-    void read().then((found) => {
-      if (isHere) setUnsent(found);
+    void read().then((now) => {
+      if (isHere) setFound(now);
     });
     return () => {
       isHere = false;
     };
   }, [read]);
-  return { unsent, lookAgain };
+  return { unsent: found ?? [], isKnown: found !== null, lookAgain };
 }

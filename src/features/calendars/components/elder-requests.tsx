@@ -77,8 +77,13 @@ function RequestWords({ request: { answer } }: { request: ElderRequest }) {
       <p>{t(key, { name, note })}</p>
       {answer.recordedByName !== null && (
         <p className="text-small text-umber-soft">
-          {t('request.recorded', { recorder: answer.recordedByName, witness: answer.witness ?? '' })}
+          {answer.witness === null
+            ? t('request.typed', { recorder: answer.recordedByName, name })
+            : t('request.recorded', { recorder: answer.recordedByName, witness: answer.witness })}
         </p>
+      )}
+      {answer.spoken !== null && (
+        <p className="text-small text-umber-soft">{t(`request.spoken.${answer.spoken.state}`)}</p>
       )}
     </>
   );

@@ -10,7 +10,8 @@ import { useToast } from '#src/ui/toast.js';
 import { useLetStand, usePutAnswer, useTakeBackAnswer } from '../api/reviews-api.js';
 import { AnswerButtons } from './answer-buttons.js';
 import type { Spokesman, SpokesmanProblem } from './for-whom.js';
-import { NotePanel } from './note-panel.js';
+import { NotePanel, type Speak } from './note-panel.js';
+import { SpokenLine } from './answer-voice.js';
 
 interface AnswerFootProps {
   version: Version;
@@ -20,6 +21,8 @@ interface AnswerFootProps {
   spokesman: (Spokesman & { name: string }) | null;
   onMissing: (missing: SpokesmanProblem) => void;
   onAnswered: () => void;
+  /** The recorder; null where there is nobody to speak. */
+  speak: Speak | null;
 }
 
 /** What is said about the elder's PIN, if that was refused. */
@@ -29,7 +32,7 @@ function pinProblem(cause: unknown): string | undefined {
 
 /** The four buttons in thumb reach, the note behind them, and what follows an answer. */
 export function AnswerFoot(props: AnswerFootProps) {
-  const { version, entryId, answer, spokesman, onMissing, onAnswered } = props;
+  const { version, entryId, answer, spokesman, onMissing, onAnswered, speak } = props;
   const { t } = useTranslation(['reviews', 'common', 'problems']);
   const words = useProblemWords();
   const say = useToast();
@@ -55,13 +58,18 @@ export function AnswerFoot(props: AnswerFootProps) {
     onMissing({ ...(elder ? { elder } : {}), ...(witness ? { witness } : {}) });
     return elder === undefined && witness === undefined;
   };
-  const save = async (chosen: AnswerWord, note: string): Promise<boolean> => {
+  const save = async (
+    chosen: AnswerWord,
+    note: string,
+    recordingId: string | null = answer?.answer === chosen ? (answer.spoken?.attachmentId ?? null) : null,
+  ): Promise<boolean> => {
     if (!ready()) return false;
     try {
       await put.mutateAsync({
         entryId,
         answer: chosen,
         note,
+        recordingId,
         onBehalfOf: spokesman?.elderId ?? null,
         witness: spokesman?.witness.trim() ?? null,
         ...(spokesman !== null && spokesman.pin !== '' ? { pin: spokesman.pin } : {}),
@@ -82,7 +90,8 @@ export function AnswerFoot(props: AnswerFootProps) {
     if (answer === null) takeBack.mutate(entryId);
     else {
       const { answer: before, note } = answer;
-      put.mutate({ entryId, answer: before, note, onBehalfOf: null, witness: null });
+      const recordingId = answer.spoken?.attachmentId ?? null;
+      put.mutate({ entryId, answer: before, note, recordingId, onBehalfOf: null, witness: null });
     }
   };
   const choose = (chosen: AnswerWord) => {
@@ -99,7 +108,8 @@ export function AnswerFoot(props: AnswerFootProps) {
           answer={noteFor}
           before={answer?.note ?? ''}
           busy={put.isPending}
-          onSave={(note) => save(noteFor, note)}
+          speak={speak}
+          onSave={(note, recordingId) => save(noteFor, note, recordingId ?? undefined)}
           onClose={() => {
             setNoteFor(null);
           }}
@@ -117,6 +127,7 @@ export function AnswerFoot(props: AnswerFootProps) {
               : t('saidNowFor', { name: spokesman.name, answer: t(`answer.${answer.answer}`) })}{' '}
             {answer.note !== '' && t('yourNote', { note: answer.note })}
           </span>
+          <SpokenLine answer={answer} />
           <span className="flex flex-wrap">
             <Button
               look="quiet"

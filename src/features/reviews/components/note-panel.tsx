@@ -1,10 +1,14 @@
-import { useId, useState } from 'react';
+import { Mic } from 'lucide-react';
+import { useId, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { AnswerWord } from '#shared/contracts/reviews.js';
 import { useKeptDraft } from '#src/lib/kept-draft.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { TextAreaField } from '#src/ui/field.js';
+
+/** Records a voice about the entry on screen, and says which one was kept. */
+export type Speak = (done: { onKept: (recordingId: string) => void; onClose: () => void }) => ReactNode;
 
 const NOTE_MAX = 1000;
 const isText = (value: unknown): value is string => typeof value === 'string';
@@ -23,13 +27,16 @@ export function NotePanel({
   busy,
   onSave,
   onClose,
+  speak,
 }: {
   draftName: string;
   answer: AnswerWord;
   before: string;
   busy: boolean;
-  onSave: (note: string) => Promise<boolean>;
+  onSave: (note: string, recordingId: string | null) => Promise<boolean>;
   onClose: () => void;
+  /** The recorder, where the elder may speak instead of writing. */
+  speak: Speak | null;
 }) {
   const { t } = useTranslation(['reviews', 'common']);
   const words = useProblemWords();
@@ -38,9 +45,11 @@ export function NotePanel({
   const [note, setNote] = useState(found?.value ?? before);
   const [problem, setProblem] = useState<string | undefined>(undefined);
 
-  const save = async () => {
+  const [isSpeaking, setIsSpeaking] = useState(false);
+
+  const save = async (recordingId: string | null = null) => {
     const text = note.trim();
-    if (answer === 'change-this' && text === '') {
+    if (answer === 'change-this' && text === '' && recordingId === null) {
       setProblem(words.field('say-what-to-change'));
       return;
     }
@@ -48,8 +57,18 @@ export function NotePanel({
       setProblem(words.field('too-long'));
       return;
     }
-    if (await onSave(text)) dropDraft();
+    if (await onSave(text, recordingId)) dropDraft();
   };
+  if (speak !== null && isSpeaking) {
+    return speak({
+      onKept: (recordingId) => {
+        void save(recordingId);
+      },
+      onClose: () => {
+        setIsSpeaking(false);
+      },
+    });
+  }
   return (
     <form
       id={formId}
@@ -60,6 +79,18 @@ export function NotePanel({
         void save();
       }}
     >
+      {speak !== null && (
+        <Button
+          look="main"
+          full
+          icon={<Mic aria-hidden size={26} />}
+          onClick={() => {
+            setIsSpeaking(true);
+          }}
+        >
+          {t('note.speak')}
+        </Button>
+      )}
       <TextAreaField
         label={t(LABELS[answer])}
         hint={t('note.kept')}
@@ -68,14 +99,14 @@ export function NotePanel({
         value={note}
         // The elder has just chosen to write: the field is what they are waiting for.
         // eslint-disable-next-line jsx-a11y/no-autofocus -- see above; focus would otherwise stay on a gone button
-        autoFocus
+        autoFocus={speak === null}
         onChange={(event) => {
           setNote(event.currentTarget.value);
           setProblem(undefined);
           keepDraft(event.currentTarget.value, null);
         }}
       />
-      <Button type="submit" look="main" full busy={busy}>
+      <Button type="submit" look={speak === null ? 'main' : 'plain'} full busy={busy}>
         {t('note.save')}
       </Button>
       <Button look="quiet" onClick={onClose}>

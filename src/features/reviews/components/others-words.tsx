@@ -1,10 +1,11 @@
 import { useTranslation } from 'react-i18next';
 import type { Answer, AnswerWord } from '#shared/contracts/reviews.js';
 import { Well } from '#src/ui/surfaces.js';
+import { ProofLine, SpokenLine } from './answer-voice.js';
 
 const SENTENCES = {
   agree: ['otherAgree', 'otherAgreeNote'],
-  'change-this': ['otherChange', 'otherChange'],
+  'change-this': ['otherChange', 'otherChangeNote'],
   'not-for-the-board': ['otherNot', 'otherNotNote'],
   'not-mine-to-say': ['otherMine', 'otherMineNote'],
 } as const satisfies Record<AnswerWord, readonly [string, string]>;
@@ -20,7 +21,14 @@ export function OthersWords({ answers }: { answers: readonly Answer[] }) {
         <Well>
           <h2 className="review-part">{t('kept')}</h2>
           {kept.map((answer) => (
-            <p key={answer.id}>{t('keptBy', { name: answer.elderName, note: answer.note })}</p>
+            <div key={answer.id}>
+              <p>
+                {answer.note === ''
+                  ? t('keptByVoice', { name: answer.elderName })
+                  : t('keptBy', { name: answer.elderName, note: answer.note })}
+              </p>
+              <SpokenLine answer={answer} />
+            </div>
           ))}
         </Well>
       )}
@@ -46,13 +54,8 @@ export function AnswerSentence({ answer }: { answer: Answer }) {
   return (
     <>
       {t(answer.note === '' ? plain : withNote, { name: answer.elderName, note: answer.note })}
-      {answer.recordedByName !== null && (
-        <span className="block text-umber-soft text-small">
-          {answer.witness === null
-            ? t('writtenByPin', { recorder: answer.recordedByName, name: answer.elderName })
-            : t('writtenDown', { recorder: answer.recordedByName, witness: answer.witness })}
-        </span>
-      )}
+      <SpokenLine answer={answer} />
+      <ProofLine answer={answer} />
     </>
   );
 }

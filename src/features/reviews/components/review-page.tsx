@@ -8,10 +8,10 @@ import { useProblemWords } from '#src/lib/problem-words.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { answersQuery } from '../api/reviews-api.js';
-import { ReviewRound, type About } from './review-round.js';
+import { ReviewRound, type About, type SpeakAbout } from './review-round.js';
 
 /** An elder's review of a submission: one entry at a time, in large type. */
-export function ReviewPage({ about }: { about: About }) {
+export function ReviewPage({ about, speak }: { about: About; speak: SpeakAbout }) {
   const { t } = useTranslation('reviews');
   const { calendarId = '', number = '' } = useParams();
   const ref = { calendarId, number: Number(number) };
@@ -21,7 +21,7 @@ export function ReviewPage({ about }: { about: About }) {
   usePageTitle(t('title', { year: version.data?.header.year ?? '' }));
 
   if (version.data && answers.data) {
-    return <ReviewRound version={version.data} answers={answers.data} about={about} />;
+    return <ReviewRound version={version.data} answers={answers.data} about={about} speak={speak} />;
   }
   const trouble = version.error ?? answers.error;
   return (

@@ -14,11 +14,14 @@ import { answersOf, nextOpen } from '../model/answers-of.js';
 import { AnswerFoot } from './answer-foot.js';
 import { EntryView } from './entry-view.js';
 import { ForWhom, type Spokesman, type SpokesmanProblem } from './for-whom.js';
+import type { Speak } from './note-panel.js';
 import { OthersWords } from './others-words.js';
 import { ReviewEnd } from './review-end.js';
 
 /** What belongs to an entry besides its words: voices, notes, who may see it. */
 export type About = (entry: VersionEntry) => ReactNode;
+/** The recorder of a voice about an entry. */
+export type SpeakAbout = (entry: VersionEntry, done: Parameters<Speak>[0]) => ReactNode;
 
 const END = 'end';
 
@@ -27,10 +30,12 @@ export function ReviewRound({
   version,
   answers,
   about,
+  speak,
 }: {
   version: Version;
   answers: { items: Answer[]; progress: ElderProgress[] };
   about: About;
+  speak: SpeakAbout;
 }) {
   const { t } = useTranslation('reviews');
   const { is } = useRoles();
@@ -133,6 +138,7 @@ export function ReviewRound({
             entryId={entry.entryId}
             answer={given.get(entry.entryId) ?? null}
             spokesman={speaksForSelf ? null : { ...spokesman, name: elderName }}
+            speak={speaksForSelf ? (done) => speak(entry, done) : null}
             onMissing={setMissing}
             onAnswered={() => {
               setSpokesman({ ...spokesman, pin: '' });

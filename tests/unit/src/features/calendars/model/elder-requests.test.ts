@@ -21,6 +21,8 @@ function answer(changes: Partial<Answer>): Answer {
     letStand: false,
     recordedByName: null,
     witness: null,
+    proof: null,
+    spoken: null,
     answeredAt: '2027-06-01T06:00:00Z',
     mine: false,
     ...changes,

@@ -72,6 +72,8 @@ const answers = {
         letStand: false,
         recordedByName: null,
         witness: null,
+        proof: null,
+        spoken: null,
         answeredAt: '2027-05-30T06:00:00.000Z',
         mine: false,
       },
