@@ -15,9 +15,9 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import type { UploadedFile } from '../../http/upload.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
+import type { IncomingFile } from '../attachments/attachment-files.service.js';
 import type { ProofsService } from '../attachments/proofs.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
@@ -119,7 +119,7 @@ export class AnswersService {
     number: number,
     entryId: string,
     input: SpokenAnswerInput,
-    file: UploadedFile,
+    file: IncomingFile,
   ): Promise<Answer> {
     const { communityId } = actor;
     const hand = handOf(actor, { ...input, witness: null }, { pin: false, voice: true });
