@@ -87,6 +87,8 @@ export default defineConfig(
     rules: {
       // `expect(spy.method)` hands a method over without calling it.
       '@typescript-eslint/unbound-method': 'off',
+      // Playwright reads from the pattern which fixtures a fixture needs: `({}, use)` needs none.
+      'no-empty-pattern': ['error', { allowObjectPatternsAsParameters: true }],
     },
   },
 );

@@ -1,20 +1,14 @@
 import { defineConfig } from '@playwright/test';
-import { freePort } from './docker-free-scripts/lib/ports.mjs';
 
-/**
- * Browser journeys against the built product. The port is chosen once, in the first process; the workers
- * inherit it. tests/support/journey-server.ts starts what listens there.
- */
-process.env['JOURNEY_PORT'] ??= String(await freePort());
-
+/** Browser journeys against the built product. tests/support/journey-product.ts starts it anew for each file. */
 export default defineConfig({
   testDir: 'tests/e2e',
   // Playwright does not read the aliases of package.json; this file repeats them for it.
   tsconfig: './tests/e2e/tsconfig.json',
   outputDir: '.tmp/journeys',
-  globalSetup: './tests/support/journey-server.ts',
-  // One product, one database, one story after the other.
-  workers: 1,
+  globalSetup: './tests/support/journey-database.ts',
+  // The tests of a file are one story and follow each other; files know nothing of each other.
+  workers: 2,
   retries: 0,
   forbidOnly: process.env['CI'] !== undefined,
   timeout: 60_000,
@@ -24,7 +18,6 @@ export default defineConfig({
     ['json', { outputFile: process.env['PLAYWRIGHT_JSON_OUTPUT_FILE'] ?? '.tmp/e2e.json' }],
   ],
   use: {
-    baseURL: `http://127.0.0.1:${process.env['JOURNEY_PORT']}`,
     browserName: 'chromium',
     locale: 'en-GB',
     timezoneId: 'UTC',

@@ -23,6 +23,9 @@ export default defineConfig({
   },
   test: {
     maxWorkers: 2,
+    // Files share their worker's modules: loading the product anew for each would take longer than its tests. So
+    // nothing mocks a module; what a test replaces it hands over, or spies on and gives back.
+    isolate: false,
     projects: [
       {
         extends: true,

@@ -126,6 +126,8 @@ export interface App {
   /** Looks what waits and sends what is due; null where letters are switched off. */
   letters: LetterRounds | null;
   express: Express;
+  /** Waits for the calls that have begun, also where whoever called has hung up. */
+  settled: () => Promise<void>;
   /** Ids of the endpoints that answer. */
   mountedIds: readonly string[];
 }
@@ -252,7 +254,12 @@ export function createApp(options: AppOptions): App {
   if (clientDir !== null) serveClient(app, clientDir);
   app.use(nothingHere);
   app.use(problemHandler(log));
-  return { express: app, mountedIds: mount.ids, letters: letterRounds(options) };
+  return {
+    express: app,
+    settled: () => mount.settled(),
+    mountedIds: mount.ids,
+    letters: letterRounds(options),
+  };
 }
 
 function letterRounds({ dataSource, clock, config, mailer }: AppOptions): LetterRounds | null {

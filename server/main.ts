@@ -26,7 +26,6 @@ import { commandScan } from './storage/file-scan.js';
 import { LocalFileStore } from './storage/local-file-store.js';
 
 const DAY_MS = 24 * 60 * 60 * 1000;
-const LETTER_ROUND_MS = 20_000;
 
 /** A reason not to start that the person at the machine can mend: one sentence, no stack. */
 class StartRefused extends Error {}
@@ -48,7 +47,7 @@ async function main(): Promise<void> {
     const inbox = await openInbox(config);
     const smtpUrl = inbox?.smtpUrl ?? config.mail.smtpUrl;
     const mailer = smtpUrl === null ? null : createSmtpMailer({ url: smtpUrl, from: config.mail.from });
-    const { express, letters } = createApp({
+    const { express, letters, settled } = createApp({
       mailer,
       inbox,
       dataSource,
@@ -65,10 +64,11 @@ async function main(): Promise<void> {
     log.info({ address: config.publicUrl }, 'listening');
     tidyDaily(dataSource, clock, log);
     if (letters === null) log.info('letters by e-mail are off: SMTP_URL is not set');
-    letters?.start(LETTER_ROUND_MS, (error) => {
+    letters?.start(config.mail.roundMs, (error) => {
       log.warn({ err: errorForLog(error) }, 'letters wait for the next round');
     });
     closeOnSignal(server, log, async () => {
+      await settled();
       await letters?.close();
       await inbox?.close();
       await dataSource.destroy();

@@ -39,6 +39,8 @@ export interface MailConfig {
   readonly from: string;
   /** Port of the inbox of development, 0 for any free one; null where there is none. */
   readonly inboxPort: number | null;
+  /** How often it is looked which letters are due. */
+  readonly roundMs: number;
 }
 
 export interface DatabaseConfig {
@@ -129,6 +131,12 @@ const variables = z.object({
     .transform(Number)
     .refine((value) => value <= 65_535, 'must be a port number, or 0 for any free one')
     .default(0),
+  LETTER_ROUND_SECONDS: z
+    .string()
+    .regex(/^\d{1,4}$/, 'must be a number of seconds between 1 and 3600')
+    .transform(Number)
+    .refine((value) => value >= 1 && value <= 3600, 'must be a number of seconds between 1 and 3600')
+    .default(20),
   LOG_LEVEL: z.enum(logLevels, `must be one of ${logLevels.join(', ')}`).default('info'),
   DEMO: yesNo('must be 1 (make the demo villages) or 0').optional(),
   FIXED_NOW: z.iso
@@ -183,6 +191,7 @@ export function parseConfig(values: Readonly<Record<string, string | undefined>>
     mail: Object.freeze({
       smtpUrl: env.SMTP_URL ?? null,
       from: env.MAIL_FROM ?? 'letters@dawnpeg.example',
+      roundMs: env.LETTER_ROUND_SECONDS * 1000,
       inboxPort: env.NODE_ENV === 'development' && env.SMTP_URL === undefined ? env.INBOX_PORT : null,
     }),
     fixedNow: env.FIXED_NOW ?? null,

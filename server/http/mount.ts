@@ -34,6 +34,7 @@ type Handler<E extends Endpoint, Who> = (call: Call<E>, who: Who) => Promise<Ans
 export class Mount {
   /** Ids of all that was mounted; a test holds them against the contracts. */
   readonly ids: string[] = [];
+  private readonly underway = new Set<Promise<unknown>>();
 
   constructor(
     private readonly router: Router,
@@ -78,6 +79,11 @@ export class Mount {
     });
   }
 
+  /** Waits for the calls that have begun, also where whoever called has hung up. */
+  async settled(): Promise<void> {
+    await Promise.allSettled(this.underway);
+  }
+
   private expect(endpoint: Endpoint, kind: Endpoint['access']['kind']): void {
     if (endpoint.access.kind !== kind) throw new TypeError(`${endpoint.id} is not ${kind}`);
   }
@@ -89,7 +95,9 @@ export class Mount {
     this.ids.push(endpoint.id);
     const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
     this.router[method](endpoint.path, async (request: Request, response: Response) => {
-      const answer = await handle(request, () => parseCall(endpoint, request), response);
+      const handling = handle(request, () => parseCall(endpoint, request), response);
+      this.underway.add(handling);
+      const answer = await handling.finally(() => this.underway.delete(handling));
       if (answer instanceof StoredFileReply) await sendStoredFile(request, response, answer.file);
       else reply(endpoint, response, answer);
     });

@@ -2,6 +2,12 @@ import type { Attachment, AttachmentInput } from '#shared/contracts/attachments.
 import { addRecordingPart, beginAttachment } from '../api/attachment-uploads.js';
 import { dropRecording, keptParts, type KeptRecording } from './kept-recordings.js';
 
+/** What carries a recording to the server. */
+export interface RecordingUploads {
+  begin: typeof beginAttachment;
+  addPart: typeof addRecordingPart;
+}
+
 interface Sending {
   onProgress: (sentBytes: number, ofBytes: number) => void;
   signal: AbortSignal;
@@ -14,6 +20,7 @@ interface Sending {
 export async function sendRecording(
   kept: KeptRecording,
   { onProgress, signal }: Sending,
+  uploads: RecordingUploads = { begin: beginAttachment, addPart: addRecordingPart },
 ): Promise<Attachment> {
   const parts = await keptParts(kept);
   const total = parts.reduce((sum, { content }) => sum + content.size, 0);
@@ -23,7 +30,7 @@ export async function sendRecording(
   };
   const [consent, ...spoken] = parts;
   if (consent?.part !== 0) throw new Error('A recording without its spoken consent');
-  let attachment = await beginAttachment(kept.communityId, inputOf(kept), consent.content, {
+  let attachment = await uploads.begin(kept.communityId, inputOf(kept), consent.content, {
     onProgress: tell(consent.content),
     signal,
   });
@@ -31,7 +38,7 @@ export async function sendRecording(
   for (const [index, { content, seconds }] of spoken.entries()) {
     const part = index + 1;
     if (!attachment.parts.some((each) => each.part === part)) {
-      attachment = await addRecordingPart(attachment.id, { part, seconds }, content, {
+      attachment = await uploads.addPart(attachment.id, { part, seconds }, content, {
         onProgress: tell(content),
         signal,
       });

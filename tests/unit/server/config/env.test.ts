@@ -71,6 +71,7 @@ describe('the settings', () => {
     ['SMTP_URL', { ...needed, SMTP_URL: 'http://mail.example.org' }],
     ['MAIL_FROM', { ...needed, MAIL_FROM: 'nobody' }],
     ['INBOX_PORT', { ...needed, INBOX_PORT: '70000' }],
+    ['LETTER_ROUND_SECONDS', { ...needed, LETTER_ROUND_SECONDS: '0' }],
     ['DEMO', { ...needed, DEMO: 'maybe' }],
     ['FIXED_NOW', { ...needed, FIXED_NOW: '2027-03-10' }],
     // Fine one by one, unsafe together:

@@ -2,15 +2,13 @@ import 'fake-indexeddb/auto';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { Attachment } from '#shared/contracts/attachments.js';
 import { keepRecording, keepSlice, keptParts } from '#src/features/attachments/model/kept-recordings.js';
-import { sendRecording } from '#src/features/attachments/model/send-recording.js';
+import { sendRecording, type RecordingUploads } from '#src/features/attachments/model/send-recording.js';
 import { textOf } from '#tests/support/blob-text.js';
 import { keptRecording } from '#tests/support/kept-recording.js';
 
-const { begin, addPart } = vi.hoisted(() => ({ begin: vi.fn(), addPart: vi.fn() }));
-vi.mock('#src/features/attachments/api/attachment-uploads.js', () => ({
-  beginAttachment: begin,
-  addRecordingPart: addPart,
-}));
+const begin = vi.fn();
+const addPart = vi.fn();
+const uploads: RecordingUploads = { begin, addPart };
 
 /** What the server has; it answers with the parts that came. */
 let came: number[];
@@ -46,7 +44,7 @@ async function kept() {
 describe('sending a recording', () => {
   it('sends the agreement first, then part after part, and then it is not on this device any more', async () => {
     const recording = await kept();
-    await sendRecording(recording, watch());
+    await sendRecording(recording, watch(), uploads);
     expect(sent).toEqual(['consent I agree', '1 one', '2 two']);
     expect(begin.mock.calls[0]?.[1]).toMatchObject({
       clientId: recording.clientId,
@@ -63,10 +61,10 @@ describe('sending a recording', () => {
       return Promise.resolve(answer());
     });
     addPart.mockRejectedValueOnce(new Error('the line is dead'));
-    await expect(sendRecording(recording, watch())).rejects.toThrow('the line is dead');
+    await expect(sendRecording(recording, watch(), uploads)).rejects.toThrow('the line is dead');
     expect(await keptParts(recording)).toHaveLength(3);
     sent = [];
-    await sendRecording(recording, watch());
+    await sendRecording(recording, watch(), uploads);
     expect(sent).toEqual(['consent I agree', '2 two']);
     expect(await keptParts(recording)).toEqual([]);
   });
@@ -74,7 +72,7 @@ describe('sending a recording', () => {
   it('without the spoken agreement does not begin', async () => {
     const recording = keptRecording();
     await keepSlice(recording.clientId, { part: 1, index: 0, content: new Blob(['one']), seconds: 2 });
-    await expect(sendRecording(recording, watch())).rejects.toThrow('spoken consent');
+    await expect(sendRecording(recording, watch(), uploads)).rejects.toThrow('spoken consent');
     expect(begin).not.toHaveBeenCalled();
   });
 
@@ -89,7 +87,7 @@ describe('sending a recording', () => {
       },
     );
     const { onProgress, signal } = watch();
-    await sendRecording(recording, { onProgress, signal });
+    await sendRecording(recording, { onProgress, signal }, uploads);
     const total = 'I agree'.length + 'one'.length + 'two'.length;
     expect(onProgress).toHaveBeenCalledWith('I agree'.length / 2, total);
   });
