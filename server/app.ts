@@ -44,6 +44,7 @@ import { NotesService } from './features/notes/notes.service.js';
 import { moonsRoutes } from './features/moons/moons.routes.js';
 import { MoonsService } from './features/moons/moons.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
+import { OwnAnswersService } from './features/reviews/own-answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
 import { SigningService } from './features/reviews/signing.service.js';
 import { LookCardService } from './features/look/look-card.service.js';
@@ -219,7 +220,8 @@ export function createApp(options: AppOptions): App {
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
   const proofs = new ProofsService(attachmentFiles, clock);
   const answers = new AnswersService(dataSource, clock, cardSignIn, proofs);
-  reviewsRoutes(mount, answers, new SigningService(dataSource, clock, versions));
+  const ownAnswers = new OwnAnswersService(dataSource, clock);
+  reviewsRoutes(mount, answers, ownAnswers, new SigningService(dataSource, clock, versions));
   const erasers = erasersOf(attachmentFiles, clock);
   const withdrawals = new WithdrawalsService(dataSource, clock, erasers, options.withdrawals);
   attachmentsRoutes(
@@ -231,7 +233,7 @@ export function createApp(options: AppOptions): App {
   sheetsRoutes(mount, new SheetsService(contents, versions, clock));
   const consents = new ConsentsService(dataSource, clock);
   const coming = new ComingMarkersService(skyYears, stars);
-  const waiting = new WaitingService(versions, answers);
+  const waiting = new WaitingService(versions, answers, ownAnswers);
   todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, consents, clock }));
   const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));

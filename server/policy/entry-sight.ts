@@ -1,5 +1,13 @@
 import type { EntityManager } from 'typeorm';
-import { appearance, isForVillage, isKept, type Appearance, type Shared } from './policy.js';
+import {
+  appearance,
+  isForVillage,
+  isKept,
+  isOfItsPeople,
+  maySee,
+  type Appearance,
+  type Shared,
+} from './policy.js';
 import { sharedById } from './sharing.repository.js';
 import type { Viewer } from './viewer.js';
 
@@ -16,6 +24,8 @@ export interface EntrySight {
   isForVillage(thing: SeenThing): boolean;
   /** Answered by its own people. */
   isKept(thing: SeenThing): boolean;
+  /** Kept, and the person is one of those who keep it and answer for it. */
+  isOfItsPeople(thing: SeenThing): boolean;
   sharedOf(entryId: string): Shared | undefined;
 }
 
@@ -36,6 +46,11 @@ export async function entrySight(
         .reduce(narrower),
     isForVillage: (thing) => both(thing).every((shared) => isForVillage(shared, viewer.today)),
     isKept: (thing) => both(thing).some(standsApart),
+    isOfItsPeople: (thing) =>
+      both(thing).some(standsApart) &&
+      both(thing).every((shared) =>
+        standsApart(shared) ? isOfItsPeople(viewer, shared) : maySee(viewer, shared),
+      ),
     sharedOf,
   };
 }

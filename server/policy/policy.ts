@@ -59,6 +59,17 @@ export function isKept({ level, details }: Pick<Shared, 'level' | 'details'>): b
   return details.tellingSeason !== null || (level !== 'open' && level !== 'village');
 }
 
+/**
+ * Of the people who keep a thing: its giver, the successor, the members of its group, the elders. Whoever sees it only
+ * because it is the village's is none of them, also while its telling season lasts.
+ */
+export function isOfItsPeople(viewer: Viewer, shared: Shared | undefined): boolean {
+  if (shared === undefined || !isKept(shared) || !maySee(viewer, shared)) return false;
+  const { level, details, giverId } = shared;
+  if (giverId === viewer.personId || details.successorId === viewer.personId) return true;
+  return level === 'group' || viewer.roles.includes('elder');
+}
+
 function isAgreedToShow({ shownUntil = null }: Shared, today: string): boolean {
   return shownUntil === null || today <= shownUntil;
 }

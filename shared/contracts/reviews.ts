@@ -2,7 +2,8 @@ import { z } from 'zod';
 import { pin } from './cards.js';
 import { id, instant, isoDate, line, listOf, text } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
-import { signatureRole, submissionNumber, version } from './versions.js';
+import { language, ROLES } from './people.js';
+import { frozenMarker, signatureRole, submissionNumber, version, versionEntryBody } from './versions.js';
 
 export const ANSWERS = ['agree', 'change-this', 'not-for-the-board', 'not-mine-to-say'] as const;
 export const answerWord = z.enum(ANSWERS);
@@ -108,6 +109,30 @@ export const ENTRY_OUTCOMES = [
 export const outcome = z.strictObject({ entryId: id, outcome: z.enum(ENTRY_OUTCOMES) });
 export type Outcome = z.infer<typeof outcome>;
 
+/** What somebody who keeps an entry says to it, for themselves. */
+export const ownAnswerInput = z
+  .strictObject({ answer: answerWord, note: text(1000) })
+  .superRefine(({ answer, note }, context) => {
+    if (answer === 'change-this' && note.length === 0) {
+      context.addIssue({ code: 'custom', path: ['note'], message: 'say-what-to-change' });
+    }
+  });
+export type OwnAnswerInput = z.infer<typeof ownAnswerInput>;
+export const ownAnswer = z.strictObject({ answer: answerWord, note: z.string() });
+export type OwnAnswer = z.infer<typeof ownAnswer>;
+
+/** The entries of a submission that the person keeps with others, and nothing else of it. */
+export const ownEntries = z.strictObject({
+  year: z.number().int(),
+  placeName: z.string(),
+  villageLanguage: language,
+  officerLanguage: language,
+  /** What these entries go by. */
+  markers: z.array(frozenMarker),
+  items: z.array(z.strictObject({ entry: versionEntryBody, answer: ownAnswer.nullable() })),
+});
+export type OwnEntries = z.infer<typeof ownEntries>;
+
 const numberParams = z.strictObject({ calendarId: id, number: submissionNumber });
 const answerParams = z.strictObject({ calendarId: id, number: submissionNumber, entryId: id });
 
@@ -159,6 +184,33 @@ export const reviewsEndpoints = {
     access: member('calendar', 'elder'),
     params: answerParams,
     response: answer,
+  }),
+  readOwn: defineEndpoint({
+    id: 'readOwnEntries',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/own-entries',
+    summary: 'The entries in review that the person keeps with others; none where there is nothing to answer',
+    access: member('calendar', ...ROLES),
+    params: numberParams,
+    response: ownEntries,
+  }),
+  putOwnAnswer: defineEndpoint({
+    id: 'putOwnAnswer',
+    method: 'PUT',
+    path: '/api/calendars/:calendarId/versions/:number/own-entries/:entryId/answer',
+    summary: 'Answer for an entry that the person keeps with others, whatever their role',
+    access: member('calendar', ...ROLES),
+    params: answerParams,
+    body: ownAnswerInput,
+    response: ownAnswer,
+  }),
+  takeBackOwnAnswer: defineEndpoint({
+    id: 'takeBackOwnAnswer',
+    method: 'DELETE',
+    path: '/api/calendars/:calendarId/versions/:number/own-entries/:entryId/answer',
+    summary: 'Take back what was said to an entry that the person keeps with others',
+    access: member('calendar', ...ROLES),
+    params: answerParams,
   }),
   sign: defineEndpoint({
     id: 'signVersion',

@@ -44,6 +44,7 @@ export type OpenWindow = z.infer<typeof openWindow>;
 
 export const WAITING_KINDS = [
   'answer-entries',
+  'answer-own-entries',
   'sign-as-elder',
   'sign-as-steward',
   'elder-asked-change',

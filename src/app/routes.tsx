@@ -110,6 +110,12 @@ export const villageRoutes: readonly AppRoute[] = [
     rail: false,
   },
   {
+    path: PATTERNS.ownEntries,
+    texts: ['reviews', 'sky', 'sharing'],
+    load: () => import('./routes/own-entries.js'),
+    rail: false,
+  },
+  {
     path: PATTERNS.villageRecords,
     texts: ['audit', 'people'],
     load: () => import('./routes/village-records.js'),

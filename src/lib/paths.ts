@@ -37,6 +37,7 @@ export const PATTERNS = {
   versions: '/calendars/:calendarId/versions',
   version: '/calendars/:calendarId/versions/:number',
   review: '/calendars/:calendarId/versions/:number/review',
+  ownEntries: '/calendars/:calendarId/versions/:number/own',
   compare: '/calendars/:calendarId/compare',
   sheet: '/calendars/:calendarId/sheet',
   takeBack: '/take-back/:communityId/:itemType/:itemId',
@@ -120,6 +121,8 @@ export const paths = {
   version: (calendarId: string, number: VersionNumber) => versionPath(calendarId, number),
   review: (calendarId: string, number: VersionNumber, query: { entry?: string } = {}) =>
     withQuery(`${versionPath(calendarId, number)}/review`, query),
+  /** What the person keeps with others of a submission. */
+  ownEntries: (calendarId: string, number: VersionNumber) => `${versionPath(calendarId, number)}/own`,
   compare: (calendarId: string, query: { from?: VersionNumber; to?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/compare`, query),
   sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>

@@ -41,6 +41,8 @@ interface Village {
   place: Place;
   calendarId: string;
   entryId: string;
+  /** In review, and kept by everybody who calls here. */
+  ownEntryId: string;
   personId: string;
   figureId: string;
   /** A picture of the figure, added by somebody who calls nothing here. */
@@ -138,6 +140,8 @@ async function clientFor({ access }: Endpoint, role: Role | null): Promise<Clien
   return access.kind === 'public' ? api.signIn(role) : clients[role];
 }
 
+const OF_ITS_PEOPLE = new Set(['putOwnAnswer', 'takeBackOwnAnswer']);
+
 function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Record<string, string> {
   const reviewed = new Set([
     'askChanges',
@@ -148,12 +152,14 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     'takeBackAnswer',
     'letDifferenceStand',
     'signVersion',
+    'readOwnEntries',
+    ...OF_ITS_PEOPLE,
   ]);
   return {
     communityId: village.community.id,
     placeId: village.place.id,
     calendarId: village.calendarId,
-    entryId: village.entryId,
+    entryId: OF_ITS_PEOPLE.has(endpoint.id) ? village.ownEntryId : village.entryId,
     personId: village.personId,
     figureId: village.figureId,
     attachmentId: village.attachmentId,
@@ -267,6 +273,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     recallVersion: () => ({ note: 'A wrong date' }),
     putAnswer: () => (speaksForAnElder ? says({ onBehalfOf: village.elderId, witness: 'Tirel' }) : says()),
     putSpokenAnswer: () => ({ answer: 'agree', note: '', onBehalfOf: village.elderId }),
+    putOwnAnswer: () => ({ answer: 'agree', note: '' }),
     signVersion: () => ({ role: role === 'steward' ? 'steward' : 'elder' }),
   };
   const make = bodies[endpoint.id];
@@ -282,6 +289,10 @@ async function furnishOwn(): Promise<Village> {
   const { variantId } = await addVariant(village.officer, calendar.id, entry.id);
   const published = await publishDraft(village, calendar.id);
   await addEntry(village.officer, calendar.id, { titleOfficer: 'Weed' });
+  const keepers = await addGroup(village.elder, 'Keepers', [village.elder, ...Object.values(clients)]);
+  const kept = await addEntry(village.elder, calendar.id, {
+    ...{ sharingLevel: 'group', sharing: { ...PLAIN_DETAILS, groupId: keepers.id } },
+  });
   const reviewed = await submit(village.officer, calendar.id);
   const answered = `/api/calendars/${calendar.id}/versions/2/entries/${entry.id}/answer`;
   await clients.elder.put(answered, says({ answer: 'change-this', note: 'Later' })).expect(200);
@@ -293,6 +304,7 @@ async function furnishOwn(): Promise<Village> {
     ...(await homeOf(village.officer)),
     calendarId: calendar.id,
     entryId: entry.id,
+    ownEntryId: kept.id,
     personId: added.person.id,
     figureId,
     attachmentId: (await addPicture(village.elder, figureId)).id,
@@ -320,6 +332,7 @@ async function furnishOther(): Promise<Village> {
     ...home,
     calendarId: calendar.id,
     entryId: entry.id,
+    ownEntryId: entry.id,
     personId: officer.personId,
     figureId,
     attachmentId: (await addPicture(officer, figureId)).id,

@@ -4,7 +4,7 @@ import { CalendarEntity } from './calendar.entity.js';
 import { codeColumn, instantColumn, sha256Column } from './columns.js';
 import { PersonEntity } from './person.entity.js';
 
-/** An elder's word on an entry with exactly this content. */
+/** An elder's word on an entry with exactly this content, or the word of somebody else who keeps it. */
 @Entity({ name: 'answer' })
 @Unique('answer_entry_elder', ['entryId', 'entryHash', 'elderId'])
 export class AnswerEntity {
@@ -40,6 +40,10 @@ export class AnswerEntity {
 
   @Column({ name: 'let_stand', type: 'boolean', default: false })
   letStand!: boolean;
+
+  /** Given by somebody who is no elder: it counts while the entry is kept by its people, and never for the village. */
+  @Column({ name: 'of_its_people', type: 'boolean', default: false })
+  ofItsPeople!: boolean;
 
   @Column({ name: 'recorded_by', type: 'uuid', nullable: true })
   recordedBy!: string | null;

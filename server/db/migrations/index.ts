@@ -10,6 +10,7 @@ import { Notes1797600000000 } from './1797600000000-notes.js';
 import { Withdrawals1797800000000 } from './1797800000000-withdrawals.js';
 import { Cards1797900000000 } from './1797900000000-cards.js';
 import { Variants1798000000000 } from './1798000000000-variants.js';
+import { AnswersOfItsPeople1798200000000 } from './1798200000000-answers-of-its-people.js';
 import { ByEar1798300000000 } from './1798300000000-by-ear.js';
 
 /** In the order in which they run. */
@@ -26,5 +27,6 @@ export const MIGRATIONS = [
   Withdrawals1797800000000,
   Cards1797900000000,
   Variants1798000000000,
+  AnswersOfItsPeople1798200000000,
   ByEar1798300000000,
 ];

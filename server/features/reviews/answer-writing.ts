@@ -61,6 +61,7 @@ export async function writeAnswer(
     answer: word.answer,
     note: word.note,
     letStand: false,
+    ofItsPeople: false,
     recordedBy,
     witness: hand.witness,
     recordingId,

@@ -1,4 +1,4 @@
-import { answeredCount, entryOutcome, type ReviewState } from '#shared/calendar/sign-off.js';
+import { answeredCount, entryOutcome, type AnswerFact, type ReviewState } from '#shared/calendar/sign-off.js';
 import type {
   Answer,
   AnswerInput,
@@ -64,7 +64,10 @@ export class AnswersService {
       where: { calendarId },
       order: { answeredAt: 'ASC', id: 'ASC' },
     });
-    const rows = given.filter(({ entryId, entryHash }) => frozen.has(`${entryId} ${entryHash}`));
+    const counted = new Set(review.answers.map(keyOf));
+    const rows = given.filter(
+      (row) => frozen.has(`${row.entryId} ${row.entryHash}`) && counted.has(keyOf(row)),
+    );
     const elderIds = await elderIdsOf(manager, actor.communityId);
     const names = await personNames(manager, [
       ...elderIds,
@@ -193,6 +196,10 @@ export class AnswersService {
     const evidence = await evidenceOf(manager, await viewerOf(manager, actor, this.clock.now()), [row]);
     return toAnswer(row, names, actor.person.id, evidence(row));
   }
+}
+
+function keyOf({ entryId, entryHash, elderId }: Omit<AnswerFact, 'answer' | 'letStand'>): string {
+  return `${entryId} ${entryHash} ${elderId}`;
 }
 
 /** One's own count goes over everything that one sees, also what its people keep. */

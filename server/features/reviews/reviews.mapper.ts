@@ -1,4 +1,4 @@
-import type { Answer } from '#shared/contracts/reviews.js';
+import type { Answer, OwnAnswer } from '#shared/contracts/reviews.js';
 import type { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { Evidence } from './answer-evidence.js';
 
@@ -23,4 +23,8 @@ export function toAnswer(
     answeredAt: row.answeredAt.toISOString(),
     mine: row.elderId === askingId || row.recordedBy === askingId,
   };
+}
+
+export function toOwnAnswer({ answer, note }: AnswerEntity): OwnAnswer {
+  return { answer, note };
 }

@@ -1,9 +1,15 @@
 import { reviewsEndpoints } from '#shared/contracts/reviews.js';
 import type { Mount } from '../../http/mount.js';
 import type { AnswersService } from './answers.service.js';
+import type { OwnAnswersService } from './own-answers.service.js';
 import type { SigningService } from './signing.service.js';
 
-export function reviewsRoutes(mount: Mount, answers: AnswersService, signing: SigningService): void {
+export function reviewsRoutes(
+  mount: Mount,
+  answers: AnswersService,
+  own: OwnAnswersService,
+  signing: SigningService,
+): void {
   mount.forMember(reviewsEndpoints.listAnswers, ({ params }, actor) =>
     answers.list(actor, params.calendarId, Number(params.number)),
   );
@@ -20,6 +26,16 @@ export function reviewsRoutes(mount: Mount, answers: AnswersService, signing: Si
   mount.forMember(reviewsEndpoints.letStand, ({ params }, actor) =>
     answers.letStand(actor, params.calendarId, Number(params.number), params.entryId),
   );
+  mount.forMember(reviewsEndpoints.readOwn, ({ params }, actor) =>
+    own.read(actor, params.calendarId, Number(params.number)),
+  );
+  mount.forMember(reviewsEndpoints.putOwnAnswer, ({ params, body }, actor) =>
+    own.put(actor, params.calendarId, Number(params.number), params.entryId, body),
+  );
+  mount.forMember(reviewsEndpoints.takeBackOwnAnswer, async ({ params }, actor) => {
+    await own.takeBack(actor, params.calendarId, Number(params.number), params.entryId);
+    return undefined;
+  });
   mount.forMember(reviewsEndpoints.sign, ({ params, body }, actor) =>
     signing.sign(actor, params.calendarId, Number(params.number), body.role),
   );

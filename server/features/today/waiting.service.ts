@@ -4,6 +4,7 @@ import type { WaitingItem } from '#shared/contracts/today.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { hasRole, seesDrafts, type Actor } from '../../http/actor.js';
 import type { AnswerList, AnswersService } from '../reviews/answers.service.js';
+import type { OwnAnswersService } from '../reviews/own-answers.service.js';
 import type { VersionsService } from '../versions/versions.service.js';
 
 /** What holds others up comes first. */
@@ -14,6 +15,7 @@ const ORDER: readonly WaitingItem['kind'][] = [
   'sign-as-steward',
   'sign-as-elder',
   'answer-entries',
+  'answer-own-entries',
   'review-progress',
   'go-on-with-draft',
   'print-published',
@@ -24,6 +26,7 @@ export class WaitingService {
   constructor(
     private readonly versions: VersionsService,
     private readonly answers: AnswersService,
+    private readonly own: OwnAnswersService,
   ) {}
 
   /** `year` is the civil year at the village: calendars of years that are over wait for nobody. */
@@ -37,7 +40,25 @@ export class WaitingService {
         items.push(item('print-published', calendar, { number, label }));
       }
     }
+    items.push(
+      ...(await this.ofTheirOwn(
+        actor,
+        calendars.filter((calendar) => calendar.year >= year),
+      )),
+    );
     return items.sort((a, b) => ORDER.indexOf(a.kind) - ORDER.indexOf(b.kind) || a.year - b.year);
+  }
+
+  /** Entries in review that the person keeps with others, beside what their roles ask of them. */
+  private async ofTheirOwn(actor: Actor, calendars: readonly Calendar[]): Promise<WaitingItem[]> {
+    const byId = new Map(calendars.map((calendar) => [calendar.id, calendar]));
+    return (await this.own.progress(actor, [...byId.keys()])).flatMap(
+      ({ calendarId, number, answered, of }) => {
+        const calendar = byId.get(calendarId);
+        if (calendar === undefined || answered === of) return [];
+        return [item('answer-own-entries', calendar, { number, done: answered, of })];
+      },
+    );
   }
 
   private async inTheMaking(actor: Actor, calendar: Calendar): Promise<WaitingItem[]> {

@@ -194,7 +194,8 @@ function withVariants(row: VersionEntryEntity, all: readonly VersionVariantEntit
   return own.length === 0 ? entry : { ...entry, variants: own };
 }
 
-function bodyOf({ entryId, content, dates, variants }: VersionEntry): VersionEntryBody {
+/** An entry without what only its seal needs. */
+export function bodyOf({ entryId, content, dates, variants }: VersionEntry): VersionEntryBody {
   const body = { entryId, content, dates };
   if (variants === undefined) return body;
   const plain = variants.map((variant): SeenVariant => {

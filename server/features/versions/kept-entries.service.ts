@@ -39,7 +39,7 @@ export async function settleKeptEntries(
 }
 
 /** Giver and successor of what is sealed, always or outside its telling season. */
-function lonePeople({ level, details, giverId }: Shared): string[] {
+export function lonePeople({ level, details, giverId }: Shared): string[] {
   if (level !== 'sealed' && details.tellingSeason === null) return [];
   return [giverId, details.successorId].filter((id) => id !== null);
 }

@@ -16,11 +16,15 @@ export async function readReviewState(
   manager: EntityManager,
   version: CalendarVersionEntity,
 ): Promise<ReviewState> {
-  const entries = (await frozenThings(manager, version.id)).filter(({ isKept }) => !isKept);
+  const things = await frozenThings(manager, version.id);
+  const entries = things.filter(({ isKept }) => !isKept);
+  const kept = new Set(things.filter(({ isKept }) => isKept).map(({ entryId }) => entryId));
+  const answers = await manager.findBy(AnswerEntity, { calendarId: version.calendarId });
   return {
     rule: version.signOffRule,
     entries: entries.map(({ entryId, hash }) => ({ entryId, hash })),
-    answers: await manager.findBy(AnswerEntity, { calendarId: version.calendarId }),
+    // What was said among an entry's people stays among them, also where the entry has become the village's since.
+    answers: answers.filter(({ ofItsPeople, entryId }) => !ofItsPeople || kept.has(entryId)),
     signatures: await signaturesOf(manager, version.id),
     writerIds: new Set(version.writerIds),
   };

@@ -148,6 +148,16 @@ export const texts = {
       'something-stands': 'Yours would be the last signature, and something still stands against an entry.',
     },
   },
+  own: {
+    title: '{{place}} {{year}}: what you keep',
+    plainTitle: 'What you keep',
+    keptHint: 'Only those who keep this see it and answer for it. What each of you says stays among you.',
+    allAnswered: 'You have answered everything that you keep.',
+    thanks: 'Thank you. You can change an answer for as long as the calendar is in review.',
+    again: 'Look at it again',
+    nothing: 'Nothing waits here',
+    nothingHint: 'The calendar is not in review, or nothing in it is yours to answer.',
+  },
   notInReview: 'This submission is not in review any more: {{state}}. Your answers stay as they are.',
   elderOnly: 'Only elders answer here. An officer or the steward can write down what an elder says.',
 

@@ -60,6 +60,11 @@ export const texts = {
       title_other: '{{place}} {{year}}: {{count}} entries wait for your answer',
       detail: 'Submission {{number}}, {{done}} of {{of}} answered',
     },
+    'answer-own-entries': {
+      title_one: '{{place}} {{year}}: {{count}} entry that you keep waits for your answer',
+      title_other: '{{place}} {{year}}: {{count}} entries that you keep wait for your answer',
+      detail: 'Only those who keep them see them; {{done}} of {{of}} answered',
+    },
     'sign-as-elder': {
       title: '{{place}} {{year}}: you have answered everything',
       detail: 'Submission {{number}} waits for your signature',

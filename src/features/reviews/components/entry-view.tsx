@@ -12,7 +12,13 @@ import { EntryDays } from './entry-days.js';
 import { ReadAloud } from './read-aloud.js';
 
 /** One entry as an elder reads it: the village's words first, then when, then everything that belongs to it. */
-export function EntryView({ entry, header }: { entry: VersionEntryBody; header: VersionHeader }) {
+export function EntryView({
+  entry,
+  header,
+}: {
+  entry: VersionEntryBody;
+  header: Pick<VersionHeader, 'year' | 'markers' | 'villageLanguage' | 'officerLanguage'>;
+}) {
   const { t } = useTranslation(['reviews', 'variants']);
   const sharing = useSharingWords();
   const giverWords = useGiverWords();

@@ -1,5 +1,5 @@
 import { ArrowLeft, ArrowRight } from 'lucide-react';
-import { useEffect, useRef, useState, type ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
 import type { Answer, ElderProgress } from '#shared/contracts/reviews.js';
@@ -11,6 +11,7 @@ import { Button } from '#src/ui/button.js';
 import { ProgressPegs } from '#src/ui/pegs.js';
 import { Page } from '#src/ui/page.js';
 import { answersOf, nextOpen } from '../model/answers-of.js';
+import { useFocusOnMove } from '../model/use-focus-on-move.js';
 import { AnswerFoot } from './answer-foot.js';
 import { EntryView } from './entry-view.js';
 import { ForWhom, type Spokesman, type SpokesmanProblem } from './for-whom.js';
@@ -158,15 +159,4 @@ export function ReviewRound({
       )}
     </Page>
   );
-}
-
-/** A new entry is read from its title: the focus goes there, and the page to its top. */
-function useFocusOnMove(index: number): void {
-  const before = useRef(index);
-  useEffect(() => {
-    if (before.current === index) return;
-    before.current = index;
-    window.scrollTo({ top: 0 });
-    document.getElementById('entry-title')?.focus({ preventScroll: true });
-  }, [index]);
 }

@@ -119,6 +119,7 @@ function MainAction({ item }: { item: WaitingItem | undefined }) {
   const label = () => {
     switch (item.kind) {
       case 'answer-entries':
+      case 'answer-own-entries':
       case 'sign-as-elder':
         return t('action.review');
       case 'go-on-with-draft':

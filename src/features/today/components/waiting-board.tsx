@@ -11,6 +11,7 @@ import { useWaitingWords } from '../model/waiting-words.js';
 
 const ICONS: Record<WaitingItem['kind'], ReactNode> = {
   'answer-entries': <StateIcon state="in-review" size={24} />,
+  'answer-own-entries': <StateIcon state="in-review" size={24} />,
   'sign-as-elder': <StateIcon state="in-review" size={24} />,
   'sign-as-steward': <StateIcon state="in-review" size={24} />,
   'elder-asked-change': <StateIcon state="changes-asked" size={24} />,
@@ -20,6 +21,12 @@ const ICONS: Record<WaitingItem['kind'], ReactNode> = {
   'go-on-with-draft': <StateIcon state="draft" size={24} />,
   'print-published': <CircleDot aria-hidden size={24} />,
 };
+
+const COUNTED: ReadonlySet<WaitingItem['kind']> = new Set([
+  'answer-entries',
+  'answer-own-entries',
+  'review-progress',
+]);
 
 /** What waits for this person: who and what in each line. */
 export function WaitingBoard({
@@ -48,9 +55,7 @@ export function WaitingBoard({
             key: `${item.kind} ${item.calendarId} ${item.entryId ?? ''} ${item.personName ?? ''}`,
             icon: ICONS[item.kind],
             ...wordsOf(item),
-            ...(item.of > 0 &&
-            item.of <= 24 &&
-            (item.kind === 'answer-entries' || item.kind === 'review-progress')
+            ...(item.of > 0 && item.of <= 24 && COUNTED.has(item.kind)
               ? { extra: <CountPegs done={item.done} total={item.of} /> }
               : {}),
           })),

@@ -31,6 +31,12 @@ export function useWaitingWords(): (item: WaitingItem) => WaitingLine {
           detail: t('waiting.answer-entries.detail', values),
           to,
         };
+      case 'answer-own-entries':
+        return {
+          title: t('waiting.answer-own-entries.title', { ...values, count: item.of - item.done }),
+          detail: t('waiting.answer-own-entries.detail', values),
+          to,
+        };
       case 'go-on-with-draft':
         return {
           title: t('waiting.go-on-with-draft.title', values),
@@ -54,6 +60,8 @@ export function addressOf({ kind, calendarId, number, entryId }: WaitingItem): s
     case 'answer-entries':
     case 'sign-as-elder':
       return paths.review(calendarId, at);
+    case 'answer-own-entries':
+      return paths.ownEntries(calendarId, at);
     case 'elder-asked-change':
     case 'elder-said-not-for-board':
       return entryId === null

@@ -1,0 +1,1 @@
+export { OwnEntriesPage as Component } from '#src/features/reviews/components/own-entries-page.js';
