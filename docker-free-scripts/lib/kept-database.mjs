@@ -36,6 +36,23 @@ export async function startKeptDatabase(settings, { outlives = false } = {}) {
 }
 
 /**
+ * How to reach the product's own tables.
+ *
+ * @param {Settings} settings
+ * @param {number} dbPort where the database really listens
+ * @returns {import('./sql-copy.mjs').Reach}
+ */
+export function reachOf(settings, dbPort) {
+  return {
+    host: settings.dbHost,
+    port: dbPort,
+    user: settings.dbUser,
+    password: settings.dbPassword ?? keptSecrets(settings.dataDir).databasePassword,
+    database: settings.dbName,
+  };
+}
+
+/**
  * What the server needs to know, as environment variables.
  *
  * @param {Settings} settings

@@ -1,18 +1,17 @@
-import { spawn, type ChildProcess } from 'node:child_process';
 import { chmodSync, mkdtempSync, readdirSync, readFileSync, rmSync, statSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { ensureBuilt } from '../../docker-free-scripts/lib/build.mjs';
 import { freePort, isFree } from '../../docker-free-scripts/lib/ports.mjs';
+import { startScript, type Started } from '#tests/support/start-script.js';
 
 /** `npm start` as a person meets it, on a data folder and ports of its own. */
 const TIMEOUT_MS = 300_000;
-const projectDir = path.resolve(import.meta.dirname, '../..');
 
 let dataDir: string;
 let ports: { readonly product: number; readonly database: number };
-const children: ChildProcess[] = [];
+const children: Started[] = [];
 
 beforeAll(async () => {
   await ensureBuilt();
@@ -93,44 +92,15 @@ describe('npm start', () => {
   );
 });
 
-interface Started {
-  /** Resolves when the script has printed its last words of a start. */
-  readonly ready: Promise<void>;
-  /** The exit code. */
-  readonly ended: Promise<number | null>;
-  readonly output: () => string;
-  readonly kill: (signal: NodeJS.Signals) => void;
-}
-
 function start(settings: Record<string, string> = {}): Started {
-  const child = spawn(process.execPath, ['docker-free-scripts/start.mjs'], {
-    cwd: projectDir,
-    env: {
-      PATH: process.env['PATH'],
-      DATA_DIR: dataDir,
-      PORT: String(ports.product),
-      DB_PORT: String(ports.database),
-      ...settings,
-    },
-    stdio: ['ignore', 'pipe', 'pipe'],
+  const started = startScript(['docker-free-scripts/start.mjs'], {
+    DATA_DIR: dataDir,
+    PORT: String(ports.product),
+    DB_PORT: String(ports.database),
+    ...settings,
   });
-  children.push(child);
-  let output = '';
-  const ended = new Promise<number | null>((resolve) => {
-    child.once('close', resolve);
-  });
-  const ready = new Promise<void>((resolve, reject) => {
-    for (const stream of [child.stdout, child.stderr])
-      stream.setEncoding('utf8').on('data', (text: string) => {
-        output += text;
-        if (output.includes('Ctrl-C stops it')) resolve();
-      });
-    void ended.then(() => {
-      reject(new Error(`it ended before it was ready:\n${output}`));
-    });
-  });
-  ready.catch(() => undefined);
-  return { ready, ended, output: () => output, kill: (signal) => child.kill(signal) };
+  children.push(started);
+  return started;
 }
 
 /** Waits until both ports are free again: the kernel tells the servers that their script has died. */

@@ -98,14 +98,10 @@ export async function openTestApi({
     dataDir,
     app: build(),
     clock,
-    visitor: () => openClient(api.app),
+    visitor: () => openClient(api.app.express),
     signIn: async (mailbox) => {
-      const client = await openClient(api.app);
-      const answer = await client.post('/api/session', {
-        email: `${mailbox}@${DEMO_DOMAIN}`,
-        password: DEMO_PASSWORD,
-      });
-      if (answer.status !== 200) throw new Error(`${mailbox} cannot sign in: ${JSON.stringify(answer.body)}`);
+      const client = await openClient(api.app.express);
+      await signInAs(client, mailbox);
       return client;
     },
     reset: async () => {
@@ -127,8 +123,18 @@ export async function openTestApi({
   return api;
 }
 
-async function openClient(app: App): Promise<Client> {
-  const agent = request.agent(app.express);
+/** Signs a browser in as a demo person, by the mailbox name. */
+export async function signInAs(client: Client, mailbox: string): Promise<void> {
+  const answer = await client.post('/api/session', {
+    email: `${mailbox}@${DEMO_DOMAIN}`,
+    password: DEMO_PASSWORD,
+  });
+  if (answer.status !== 200) throw new Error(`${mailbox} cannot sign in: ${JSON.stringify(answer.body)}`);
+}
+
+/** A new browser, before the product of this process or before one that listens at an address. */
+export async function openClient(product: App['express'] | string): Promise<Client> {
+  const agent = request.agent(product);
   let cookie = '';
   const keepCookie = ({ headers }: Response) => {
     const [sent] = (headers['set-cookie'] ?? []) as readonly string[];

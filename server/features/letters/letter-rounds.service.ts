@@ -1,5 +1,5 @@
 import { subDays } from 'date-fns';
-import { LessThan, type EntityManager } from 'typeorm';
+import { In, LessThan, type EntityManager } from 'typeorm';
 import { LetterEntity } from '../../db/entities/letter.entity.js';
 import type { LetterPlannerService } from './letter-planner.service.js';
 import type { LetterSenderService } from './letter-sender.service.js';
@@ -44,4 +44,9 @@ export class LetterRounds {
 /** Old letters go; by then nothing that they were about is in review any more. */
 export async function removeOldLetters(manager: EntityManager, now: Date): Promise<void> {
   await manager.delete(LetterEntity, { createdAt: LessThan(subDays(now, KEPT_DAYS)) });
+}
+
+/** After older tables came back: what waits in them may have gone since, and nobody gets a letter twice. */
+export async function holdLettersBack(manager: EntityManager): Promise<void> {
+  await manager.update(LetterEntity, { state: In(['waiting', 'sending']) }, { state: 'unsure' });
 }
