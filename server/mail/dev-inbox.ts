@@ -23,6 +23,7 @@ export async function startDevInbox(port: number): Promise<DevInbox> {
             text: mail.text ?? '',
             html: typeof mail.html === 'string' ? mail.html : '',
             headerNames: [...mail.headers.keys()],
+            headers: mail.headerLines.map(({ line }) => line).join('\n'),
           });
           received.splice(KEPT);
           done();

@@ -6,6 +6,8 @@ export interface ReceivedLetter {
   text: string;
   html: string;
   headerNames: string[];
+  /** All of them as they came. */
+  headers: string;
 }
 
 export interface DevInbox {

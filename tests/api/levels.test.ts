@@ -1,78 +1,94 @@
 import { randomUUID } from 'node:crypto';
+import { readFileSync } from 'node:fs';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
-import { furnishLevels, type LevelledVillage, type Planted } from '#tests/support/levelled-village.js';
-import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
+import type { Endpoint } from '#shared/contracts/endpoint.js';
+import { openTestApi, type TestApi } from '#tests/support/api.js';
+import { isRefusal, pathsOf, READING, wholeTextOf } from '#tests/support/every-endpoint.js';
+import { signInAgain } from '#tests/support/levelled-people.js';
+import { furnishLevels, type LevelledVillage } from '#tests/support/levelled-village.js';
+import { PERMISSION_GUIDE } from '../../docker-free-scripts/lib/permission-table.js';
+import {
+  COMBINATIONS,
+  isOnBoard,
+  PEOPLE,
+  sees,
+  type Combination,
+  type Someone,
+} from '../../docker-free-scripts/lib/visibility-rules.js';
+import { withVisibilityTables } from '../../docker-free-scripts/lib/visibility-table.js';
+import {
+  heldFor,
+  HOLDS,
+  HOLDS_NOTHING,
+  PLANTED_KINDS,
+  type Planted,
+} from '../../docker-free-scripts/lib/what-answers-hold.js';
 
 /**
- * Marker words stand in things of every level. Every endpoint of the contracts that reads is asked by everybody for
- * everything, and no answer may hold a word that is not for who asks. A new endpoint comes into this by itself; one
- * whose parameters are new has to be given values here.
+ * A word stands in a thing of every level, telling season and consent. Every endpoint of the contracts that reads is
+ * asked by everybody, and what is found in its answers is held against rules that are said without the server's own:
+ * neither a word more nor a word less. A new endpoint comes into this by itself and has to say what it holds.
  */
 let api: TestApi;
 let village: LevelledVillage;
-let people: Record<string, Client>;
+/** What the product told to whom, as `endpoint person kind level season consent`. */
+const told = new Set<string>();
+const toldKey = (
+  endpointId: string,
+  person: Someone,
+  { kind, level, season, consent }: Omit<Planted, 'word'>,
+) => [endpointId, person, kind, level, season, consent].join(' / ');
 
 beforeAll(async () => {
   api = await openTestApi();
-  village = await furnishLevels(api);
-  people = {
-    steward: village.steward,
-    officer: village.officer,
-    giver: village.elder,
-    heir: village.elder2,
-    weaver: village.elder3,
-    staff: village.staff,
-    'observer of the group': village.observer,
-    'officer of another village': village.officer2,
-    visitor: await api.visitor(),
-  };
+  village = await furnishLevels(api, COMBINATIONS);
 }, 120_000);
 afterAll(() => api.close());
 
 describe('what every endpoint says to everybody', () => {
   it.each(READING.map((endpoint) => [`${endpoint.method} ${endpoint.path}`, endpoint] as const))(
-    '%s holds no word that is not for who asks',
+    '%s holds exactly what is for who asks',
     async (_, endpoint) => {
-      for (const [name, client] of Object.entries(people)) {
-        for (const path of pathsOf(endpoint, village)) {
-          const text = await textOf(client, path, endpoint);
-          const leaked = village.planted.filter(
-            ({ word, for: seers }) => text.includes(word) && !seers.has(name),
-          );
-          expect(leaked.map(({ word }) => `${name} read ${word} at ${path}`)).toEqual([]);
-        }
+      const asked = await Promise.all(PEOPLE.map((person) => askAll(endpoint, person)));
+      for (const { person, found } of asked) {
+        for (const thing of found) told.add(toldKey(endpoint.id, person, thing));
+        const expected = heldFor(endpoint.id, person, village.planted);
+        expect([person, named(found)]).toEqual([person, named(expected)]);
       }
+      expect(asked.some(({ answered }) => answered)).toBe(true);
     },
   );
 
-  it('shows each thing to its own people somewhere, so that the search above means something', async () => {
-    for (const [name, client] of Object.entries(people)) {
-      const seen = new Set<string>();
-      for (const endpoint of READING.filter(({ id }) => SHOWING.has(id))) {
-        for (const path of pathsOf(endpoint, village)) {
-          const text = await textOf(client, path, endpoint);
-          for (const { word } of village.planted) if (text.includes(word)) seen.add(word);
-        }
-      }
-      const expected = village.planted.filter(({ for: seers }) => seers.has(name)).map(({ word }) => word);
-      expect([name, [...seen].sort()]).toEqual([name, expected.sort()]);
+  async function askAll(endpoint: Endpoint, person: Someone) {
+    const found = new Set<Planted>();
+    let answered = false;
+    for (const path of pathsOf(endpoint, village)) {
+      const text = await wholeTextOf(village.people[person], path, endpoint);
+      answered ||= !isRefusal(text);
+      for (const thing of village.planted) if (text.includes(thing.word)) found.add(thing);
     }
-  });
-});
+    return { person, found, answered };
+  }
 
-describe('the printed board', () => {
-  it.each(['month-cards', 'year-board'])(
-    '%s holds open and village entries alone, whoever prints it',
-    async (layout) => {
-      for (const client of [village.officer, village.elder, village.staff]) {
-        const path = `/api/calendars/${village.calendarId}/versions/${village.publishedNumber}/sheet.pdf?layout=${layout}`;
-        const text = await textOf(client, path, { fileType: 'application/pdf' });
-        const printed = village.planted.filter(({ word }) => text.includes(word));
-        expect(printed.map(({ where }) => where).sort()).toEqual(['open entry', 'village entry']);
-      }
-    },
-  );
+  it('is said beforehand for every endpoint: what it holds, or why nothing', () => {
+    const said = [...Object.keys(HOLDS), ...Object.keys(HOLDS_NOTHING)];
+    expect(said.sort()).toEqual(READING.map(({ id }) => id).sort());
+    const asked = [...Object.keys(village.queries), ...Object.keys(village.only)];
+    expect(asked.filter((id) => !said.includes(id))).toEqual([]);
+  });
+
+  it('is found somewhere, each kind of thing, so that the search means something', () => {
+    const kinds = new Set([...told].map((key) => key.split(' / ')[2]));
+    expect([...kinds].sort()).toEqual([...PLANTED_KINDS].sort());
+  });
+
+  it('is shown in the guide as it was told (npm run permissions -- --write)', () => {
+    const guide = readFileSync(PERMISSION_GUIDE, 'utf8');
+    const asTold = withVisibilityTables(guide, (endpointId, person, thing) =>
+      told.has(toldKey(endpointId, person, thing)),
+    );
+    expect(asTold).toBe(guide);
+  });
 });
 
 describe('a thing that somebody does not see', () => {
@@ -109,39 +125,40 @@ describe('a thing that somebody does not see', () => {
 });
 
 describe('a telling season', () => {
-  it('opens on its first day and closes after its last, by the clock of the village', async () => {
-    const word = plantedIn('season entry').word;
-    const seen: Record<string, boolean> = {};
-    // Upper Tazimel is three hours ahead of universal time.
-    for (const at of [
-      '2027-07-31T20:59:00Z',
-      '2027-07-31T21:01:00Z',
-      '2027-08-31T20:59:00Z',
-      '2027-08-31T21:01:00Z',
-    ]) {
-      api.clock.set(new Date(at));
-      const officer = await api.signIn('officer');
-      const path = `/api/calendars/${village.calendarId}/versions/${village.publishedNumber}`;
-      seen[at] = (await officer.get(path).expect(200)).text.includes(word);
+  /** Upper Tazimel is three hours ahead of universal time. One season is 20 November to 10 December, the other August. */
+  it.each([
+    ['the winter season’s last minute', '2026-12-10T20:59:00Z', 'inside'],
+    ['the minute after it', '2026-12-10T21:01:00Z', null],
+    ['the last minute before August', '2027-07-31T20:59:00Z', null],
+    ['August’s first minute', '2027-07-31T21:01:00Z', 'outside'],
+    ['August’s last minute', '2027-08-31T20:59:00Z', 'outside'],
+    ['the minute after it', '2027-08-31T21:01:00Z', null],
+    ['the last minute before the next winter season', '2027-11-19T20:59:00Z', null],
+    ['its first minute', '2027-11-19T21:01:00Z', 'inside'],
+  ] as const)('tells what is told then, to everybody alike: %s', async (_, at, told) => {
+    api.clock.set(new Date(at));
+    const people = await signInAgain(api, village.people);
+    const version = `/api/calendars/${village.calendarId}/versions/${village.publishedNumber}`;
+    const entries = village.planted.filter(({ kind }) => kind === 'entry');
+    const inside = (thing: Combination): Combination =>
+      thing.season === 'none' ? thing : { ...thing, season: thing.season === told ? 'inside' : 'outside' };
+    const versions = await Promise.all(
+      PEOPLE.map(async (one) => [one, await people[one].get(version)] as const),
+    );
+    for (const [person, { text }] of versions) {
+      const found = entries.filter(({ word }) => text.includes(word));
+      const expected = entries.filter((thing) => sees(person, inside(thing)));
+      expect([person, named(found)]).toEqual([person, named(expected)]);
     }
-    api.clock.set(new Date('2026-12-01T06:00:00Z'));
-    expect(Object.values(seen)).toEqual([false, true, true, false]);
+    const { text } = await people.staff.get(`${version}/sheet?layout=year-board`);
+    const printed = entries.filter(({ word }) => text.includes(word));
+    expect(named(printed)).toEqual(named(entries.filter((thing) => isOnBoard(inside(thing)))));
   });
 });
 
-/** Where a thing of each person is to be found. */
-const SHOWING = new Set([
-  'listEntries',
-  'readVersion',
-  'listFigures',
-  'listAnswers',
-  'readConsent',
-  'listAttachments',
-  'listNotes',
-]);
-
-function plantedIn(where: string): Planted {
-  const found = village.planted.find((one) => one.where === where);
-  if (!found) throw new Error(`Nothing is planted in ${where}`);
-  return found;
+/** Things by what they are; their words say nothing to whoever reads a failure. */
+function named(things: Iterable<Planted>): string[] {
+  return [...things]
+    .map(({ kind, level, season, consent }) => `${kind}: ${level}, season ${season}, ${consent}`)
+    .sort();
 }

@@ -43,10 +43,11 @@ export async function addPicture(
   client: Client,
   subjectId: string,
   changes: Partial<AttachmentInput> = {},
+  file?: Buffer,
 ): Promise<Attachment> {
   const input = attachmentInput({ subjectId, ...changes });
-  return (await client.upload(attachmentsPath(client), input, await plainPicture()).expect(201))
-    .body as Attachment;
+  const sent = client.upload(attachmentsPath(client), input, file ?? (await plainPicture()));
+  return (await sent.expect(201)).body as Attachment;
 }
 
 /** A recording with its spoken consent and as many parts as there are texts. */

@@ -7,6 +7,10 @@ import { readPdfText } from './pdf/read-text.js';
 export interface Askable {
   params: Record<string, readonly string[]>;
   queries: Record<string, readonly string[]>;
+  /** Parameters that belong together, where a path names them all. */
+  pairs?: readonly Record<string, string>[];
+  /** Values of parameters for one endpoint alone. */
+  only?: Record<string, Record<string, readonly string[]>>;
 }
 
 export const READING = ENDPOINTS.filter(({ method }) => method === 'GET');
@@ -35,13 +39,37 @@ export async function textOf(
   return file.subarray(0, 5).toString() === '%PDF-' ? readPdfText(file) : file.toString();
 }
 
+/** A list with all its pages; anything else as it is. */
+export async function wholeTextOf(client: Client, path: string, endpoint: Endpoint): Promise<string> {
+  let text = await textOf(client, path, endpoint);
+  for (let next = nextCursorOf(text); next !== null;) {
+    const more = `${path}${path.includes('?') ? '&' : '?'}cursor=${encodeURIComponent(next)}`;
+    const page = await textOf(client, more, endpoint);
+    text += page;
+    next = nextCursorOf(page);
+  }
+  return text;
+}
+
+export function isRefusal(text: string): boolean {
+  return text.startsWith('{"type":"/problems/');
+}
+
+function nextCursorOf(text: string): string | null {
+  return /"nextCursor":"([^"]+)"/u.exec(text)?.[1] ?? null;
+}
+
 /** Every path of the endpoint that names something of the village. */
 export function pathsOf(endpoint: Endpoint, village: Askable): string[] {
   const values = village.params;
   const names = [...endpoint.path.matchAll(/:([A-Za-z]+)/gu)].map(([, name = '']) => name);
-  let filled: Record<string, string>[] = [{}];
+  const pairs = (village.pairs ?? []).filter((pair) =>
+    Object.keys(pair).every((name) => names.includes(name)),
+  );
+  let filled: Record<string, string>[] = pairs.length > 0 ? [...pairs] : [{}];
   for (const name of names) {
-    const list = values[name];
+    if (filled[0] !== undefined && name in filled[0]) continue;
+    const list = village.only?.[endpoint.id]?.[name] ?? values[name];
     if (!list) throw new Error(`Say in levelled-village.ts what stands for :${name} of ${endpoint.id}.`);
     filled = filled.flatMap((params) => list.map((value) => ({ ...params, [name]: value })));
   }

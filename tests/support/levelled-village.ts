@@ -3,38 +3,34 @@ import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { ConsentContent } from '#shared/contracts/consents.js';
 import type { FigureInput } from '#shared/contracts/figures.js';
 import { PLAIN_DETAILS, SHARED_ITEM_TYPES, type SharingChange } from '#shared/contracts/sharing.js';
-import type { Client, TestApi } from './api.js';
+import type { Version } from '#shared/contracts/versions.js';
+import { LEVELS, type Combination } from '../../docker-free-scripts/lib/visibility-rules.js';
 import {
-  addEntry,
-  beginCalendar,
-  entryInput,
-  openVillage,
-  publish,
-  says,
-  setRoles,
-  submit,
-  versionPath,
-  type Village,
-} from './calendar-api.js';
-import type { Variant, VariantInput } from '#shared/contracts/variants.js';
-import { variantInput } from './variant-api.js';
-import { addConsent } from './consent-api.js';
-import { addRecording } from './attachment-api.js';
-import { addFigure, figureInput } from './figure-api.js';
+  isAskedFigure,
+  isLookedAt,
+  type Planted,
+  type PlantedKind,
+} from '../../docker-free-scripts/lib/what-answers-hold.js';
+import type { Client, TestApi } from './api.js';
+import { addEntry, beginCalendar, entryInput, publish, says, submit, versionPath } from './calendar-api.js';
+import { figureInput } from './figure-api.js';
+import { levelledEntry, settleConsent, type Circle } from './levelled-entries.js';
+import { openLevelledPeople, type LevelledPeople } from './levelled-people.js';
+import {
+  addLevelledFigures,
+  addLevelledFiles,
+  addLevelledVariant,
+  plainAt,
+  VILLAGE_THINGS,
+  type LevelledFigure,
+} from './levelled-things.js';
 import { addNote } from './notes-api.js';
-import { addGroup, details } from './sharing-api.js';
+import { addGroup } from './sharing-api.js';
 
-/** A word that stands in one thing alone, and who may read it on the test's day. */
-export interface Planted {
-  word: string;
-  where: string;
-  for: ReadonlySet<string>;
-}
+/** Remembers what a word stands for; makes one where none is given. */
+export type Plant = (kind: PlantedKind, combination: Combination, word?: string) => string;
 
-export interface LevelledVillage extends Village {
-  staff: Client;
-  observer: Client;
-  officer2: Client;
+export interface LevelledVillage extends LevelledPeople {
   planted: Planted[];
   calendarId: string;
   publishedNumber: number;
@@ -48,208 +44,138 @@ export interface LevelledVillage extends Village {
   /** What stands for the parameters of paths, and queries to try, by endpoint. */
   params: Record<string, readonly string[]>;
   queries: Record<string, readonly string[]>;
+  pairs: readonly Record<string, string>[];
+  /** Where drawing takes long: every number is asked for by one of the two. */
+  only: Record<string, Record<string, readonly string[]>>;
 }
 
-const OFFICE = ['steward', 'officer', 'giver', 'heir', 'weaver'];
-const VILLAGE = [...OFFICE, 'staff', 'observer of the group'];
+interface LevelledEntry extends Combination {
+  id: string;
+  content: EntryInput;
+}
+
+/** One entry for each level, and one outside its telling season. */
+export const ONE_PER_LEVEL: readonly Combination[] = [
+  ...LEVELS.map(plainAt),
+  { level: 'village', season: 'outside', consent: 'nobody asked' },
+];
 
 /**
- * A village with an entry and a figure at every level, published as far as their people agreed, and a second
- * submission in review. The giver of all that is kept is elder A-1; A-2 is their successor; A-3 and an observer
- * belong with them to a group.
+ * A village with an entry of each combination, one more that goes by an elders' figure, and figures, variants, voices,
+ * pictures, notes, answers and consents at every level. All is published as its people agreed, and a second submission
+ * is in review; what givers then said about their consent came last, as in life. The giver of everything is elder A-1,
+ * A-2 is their successor, A-3 and the demo's observer belong with them to a group.
  */
-export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
+export async function furnishLevels(
+  api: TestApi,
+  combinations: readonly Combination[] = ONE_PER_LEVEL,
+): Promise<LevelledVillage> {
   await api.reset();
-  const village = await openVillage(api);
-  const [staff, observer, officer2] = await Promise.all([
-    api.signIn('staff'),
-    api.signIn('observer'),
-    api.signIn('officer2'),
-  ]);
+  const village = await openLevelledPeople(api);
   const { elder, elder2, elder3, officer } = village;
   const planted: Planted[] = [];
-  const plant = (where: string, seers: readonly string[]): string => {
-    const word = `Zq${planted.length}xw${where.replace(/\W/gu, '')}`;
-    planted.push({ word, where, for: new Set(seers) });
+  const plant: Plant = (kind, { level, season, consent }, word = `Zq${planted.length}xw`) => {
+    planted.push({ word, kind, level, season, consent });
     return word;
   };
-  const group = await addGroup(elder, 'Weavers', [elder, elder3, observer]);
+  const group = await addGroup(elder, 'Weavers', [elder, elder3, village.observer]);
+  const circle: Circle = { giver: elder, successor: elder2, groupId: group.id };
   const calendar = await beginCalendar(village);
-  const wordy = (word: string): Partial<EntryInput> => ({
-    titleOfficer: `Do ${word}`,
-    titleVillage: word,
-    notes: word,
-    caution: word,
-    otherSigns: word,
-    ifLate: word,
-    giver: word,
-  });
-  const give = (where: string, by: Client, seers: readonly string[], changes: Partial<EntryInput>) =>
-    addEntry(by, calendar.id, { ...wordy(plant(where, seers)), ...changes });
 
-  const figures = {
-    village: await addFigure(
-      officer,
-      named(plant('village figure', VILLAGE), plant('elders story', ['giver', 'officer', 'heir', 'weaver']), {
-        storyLevel: 'elders',
-      }),
-    ),
-    group: await addFigureBy(
-      api,
-      elder,
-      { sharingLevel: 'group', sharing: details({ groupId: group.id }) },
-      plant('group figure', ['giver', 'weaver', 'observer of the group']),
-    ),
-    elders: await addFigureBy(
-      api,
-      elder,
-      { sharingLevel: 'elders' },
-      plant('elders figure', ['giver', 'heir', 'weaver']),
-    ),
+  const figures = await addLevelledFigures(api, circle, [...LEVELS.map(plainAt), ...VILLAGE_THINGS], plant);
+  const figureAt = (level: Combination['level']) => expectFound(figures, plainAt(level));
+  const entries: LevelledEntry[] = [];
+  const give = async (combination: Combination, led: Partial<EntryInput> | null = null) => {
+    // An entry is seen by no more people than the figure that it goes by.
+    const seen = led === null ? combination : plainAt('elders');
+    const word = plant(led === null ? 'entry' : 'led entry', seen);
+    const writer = isVillages(combination) ? officer : elder;
+    const input = { ...levelledEntry(word, combination, circle, entries.length), ...led };
+    const { id, content } = await addEntry(writer, calendar.id, input);
+    entries.push({ ...seen, id, content });
   };
-  const open = await give('open entry', officer, VILLAGE, { sharingLevel: 'open' });
-  await give('village entry', officer, VILLAGE, { sharingLevel: 'village' });
-  const kept = [
-    await give('group entry', elder, ['giver', 'weaver', 'observer of the group'], {
-      sharingLevel: 'group',
-      sharing: details({ groupId: group.id }),
-    }),
-    await give('elders entry', elder, ['giver', 'heir', 'weaver'], {
-      sharingLevel: 'elders',
-      kind: 'belief',
-    }),
-    await give('sealed entry', elder, ['giver', 'heir'], {
-      sharingLevel: 'sealed',
-      sharing: details({ successorId: elder2.personId }),
-    }),
-    await give('season entry', elder, ['giver'], {
-      sharingLevel: 'village',
-      sharing: details({ tellingSeason: { from: { month: 8, day: 1 }, to: { month: 8, day: 31 } } }),
-    }),
-    await give('entry by a kept figure', elder, ['giver', 'heir', 'weaver'], {
-      sharingLevel: 'elders',
-      lead: {
-        type: 'marker',
-        markerKey: figures.elders.markerKey,
-        phenomenon: 'heliacal-rising',
-        occurrence: 1,
-      },
-    }),
+  for (const combination of combinations) await give(combination);
+  await give({ level: 'village', season: 'inside', consent: 'nobody asked' }, ledBy(figureAt('elders')));
+  const open = expectFound(entries, plainAt('open'));
+  const kept = entries.filter((entry) => !isVillages(entry));
+  const variant = (entryId: string, level: 'village' | 'elders', seen: Combination) =>
+    addLevelledVariant(elder, calendar.id, entryId, level, plant('variant', seen));
+  const variantIds = [
+    await variant(open.id, 'village', plainAt('village')),
+    await variant(open.id, 'elders', plainAt('elders')),
+    await variant(expectFound(entries, plainAt('elders')).id, 'village', plainAt('elders')),
   ];
-  const variant = async (
-    where: string,
-    entryId: string,
-    seers: readonly string[],
-    level: VariantInput['sharingLevel'],
-  ) => {
-    const word = plant(where, seers);
-    const path = `/api/calendars/${calendar.id}/entries/${entryId}/variants`;
-    const body = variantInput({
-      giver: word,
-      note: word,
-      otherSigns: word,
-      ifLate: word,
-      sharingLevel: level,
-    });
-    return (await elder.post(path, body).expect(201)).body as Variant;
-  };
-  const variants = [
-    await variant('village variant', open.id, VILLAGE, 'village'),
-    await variant('elders variant', open.id, ['giver', 'heir', 'weaver'], 'elders'),
-    await variant('variant of a kept entry', kept[1]?.id ?? '', ['giver', 'heir', 'weaver'], 'village'),
-  ];
+
   const first = await submit(officer, calendar.id);
   for (const entry of kept) {
-    for (const client of [elder, elder2, elder3]) {
-      await client.put(`${versionPath(first)}/entries/${entry.id}/answer`, says());
-    }
+    // Somebody besides the giver has to agree: of a group one of its own, of all else the successor.
+    const isGroups = entry.level === 'group' && entry.season !== 'outside';
+    await answer(isGroups ? elder3 : elder2, first, entry, says());
   }
   const published = await publish(village, first);
-  await give('later entry', officer, OFFICE, { sharingLevel: 'village' });
-  const reviewed = await submit(officer, calendar.id);
-  for (const entry of kept) {
-    const word = plant(`answer on ${entry.content.sharingLevel} ${kept.indexOf(entry)}`, [
-      'giver',
-      ...answerers(entry.content),
-    ]);
-    await elder.put(
-      `${versionPath(reviewed)}/entries/${entry.id}/answer`,
-      says({ answer: 'change-this', note: word }),
-    );
-  }
-  const consents = [
-    await addConsent(officer, 'entry', open.id, {
-      ...agreed(plant('consent on the open entry', OFFICE)),
-      uses: ['keep', 'show', 'print'],
-    }),
-    await addConsent(elder, 'figure', figures.elders.id, {
-      ...agreed(plant('consent on the elders figure', ['giver', 'heir', 'weaver'])),
-      giverId: elder.personId,
-    }),
-  ];
-  for (const entry of kept) {
-    const { sharingLevel } = entry.content;
-    const word = plant(`consent on ${sharingLevel} ${kept.indexOf(entry)}`, [
-      'giver',
-      ...answerers(entry.content),
-    ]);
-    consents.push(await addConsent(elder, 'entry', entry.id, { ...agreed(word), giverId: elder.personId }));
-  }
-  const [openEntry] = reviewed.entries;
-  const recordings = [];
-  for (const [level, seers, changes] of [
-    ['village', VILLAGE, {}],
-    ['elders', ['giver', 'heir', 'weaver'], {}],
-    ['group', ['giver', 'weaver', 'observer of the group'], { groupId: group.id }],
-    ['sealed', ['giver', 'heir'], { successorId: elder2.personId }],
-  ] as const) {
-    const title = plant(`${level} recording`, seers);
-    recordings.push(
-      await addRecording(elder, openEntry?.entryId ?? '', {
-        ...{ subjectType: 'entry', title, speaker: title, sharingLevel: level, sharing: details(changes) },
-      }),
-    );
-  }
-  for (const [index, entry] of [open, ...kept].entries()) {
-    const { sharingLevel } = entry.content;
-    const seers = entry === open ? VILLAGE : ['giver', ...readers(entry.content)];
-    await addNote(elder, { subjectId: entry.id, text: plant(`note on ${sharingLevel} ${index}`, seers) });
-  }
-  const forElders = plant('note for the elders', ['giver', 'heir', 'weaver']);
-  await addNote(elder, { subjectId: open.id, text: forElders, level: 'elders' });
-  await addNote(elder, {
-    ...{ subjectType: 'figure', subjectId: figures.elders.id },
-    text: plant('note on the elders figure', ['giver', 'heir', 'weaver']),
+  const later = plant('later entry', plainAt('village'));
+  await addEntry(officer, calendar.id, {
+    ...levelledEntry(later, plainAt('village'), circle, entries.length),
   });
+  const reviewed = await submit(officer, calendar.id);
+  const looked = entries.filter(isLookedAt);
+  for (const entry of looked.filter((one) => !isVillages(one))) {
+    await answer(elder, reviewed, entry, says({ answer: 'change-this', note: plant('answer', entry) }));
+  }
+  const attachmentIds = await addFiles(entries, circle, plant);
+  for (const { id, ...entry } of looked) {
+    await addNote(elder, { subjectId: id, text: plant('note', entry) });
+  }
+  await addNote(elder, { subjectId: open.id, text: plant('note', plainAt('elders')), level: 'elders' });
+  const elders = figureAt('elders');
+  await addNote(elder, {
+    ...{ subjectType: 'figure', subjectId: elders.id },
+    text: plant('note', plainAt('elders')),
+  });
+  const consentIds = await settleConsents(elder, entries, figures, plant);
+  const askedFigures = figures.filter(isAskedFigure);
+  const sealed = expectFound(entries, plainAt('sealed'));
   const numbers = [String(published.number), String(reviewed.number)];
-  const [sealed] = kept.slice(2);
+  const about = (subjectType: string, things: readonly { id: string }[]) =>
+    things.map(({ id }) => `?subjectType=${subjectType}&subjectId=${id}`);
   return {
     ...village,
-    ...{ staff, observer, officer2, planted },
+    planted,
     calendarId: calendar.id,
     publishedNumber: published.number,
     reviewedNumber: reviewed.number,
-    hiddenEntryId: sealed?.id ?? '',
-    hiddenFigureId: figures.elders.id,
+    hiddenEntryId: sealed.id,
+    hiddenFigureId: elders.id,
     content: entryInput(),
     figure: figureInput(),
     sharingChange: { sharing: { level: 'sealed', ...PLAIN_DETAILS }, version: 1 },
+    pairs: [
+      ...looked.map(({ id }) => ({ itemType: 'entry', itemId: id })),
+      ...askedFigures.map(({ id }) => ({ itemType: 'figure', itemId: id })),
+      ...askedFigures.map(({ id }) => ({ itemType: 'story', itemId: id })),
+      ...attachmentIds.map((id) => ({ itemType: 'attachment', itemId: id })),
+      ...variantIds.map((id) => ({ itemType: 'variant', itemId: id })),
+    ],
+    only: {
+      printSheet: { number: [numbers[0] ?? '', 'draft'] },
+      previewSheet: { number: numbers },
+    },
     params: {
       communityId: [officer.communityId],
       placeId: [village.placeId],
       calendarId: [calendar.id],
-      entryId: [open, ...kept].map(({ id }) => id),
+      entryId: looked.map(({ id }) => id),
       number: [...numbers, 'draft'],
-      figureId: Object.values(figures).map(({ id }) => id),
-      markerKey: Object.values(figures).map(({ markerKey }) => markerKey),
+      figureId: figures.map(({ id }) => id),
+      markerKey: askedFigures.map(({ markerKey }) => markerKey),
       itemType: [...SHARED_ITEM_TYPES],
-      itemId: [...kept, ...Object.values(figures), ...recordings].map(({ id }) => id),
+      itemId: [...looked, ...figures].map(({ id }) => id),
       groupId: [group.id],
-      variantId: variants.map(({ variantId }) => variantId),
-      consentId: consents.map(({ id }) => id),
+      variantId: variantIds,
+      consentId: consentIds,
       noteId: [randomUUID()],
       withdrawalId: [randomUUID()],
-      attachmentId: recordings.map(({ id }) => id),
+      attachmentId: attachmentIds,
       part: ['0', '1'],
       personId: [elder.personId],
       deviceId: ['0'.repeat(64)],
@@ -260,25 +186,86 @@ export async function furnishLevels(api: TestApi): Promise<LevelledVillage> {
       exportStarsCsv: ['?year=2027'],
       readStar: ['?year=2027'],
       listSkylineEffects: ['?year=2027'],
-      findMarkers: ['?year=2027&from=06-10', '?year=2027&from=01-10', '?year=2027&from=10-10'],
+      listSkyMarkers: ['?year=2027'],
+      readStarAir: ['?year=2027'],
+      readMoons: moonsBy(askedFigures),
+      exportMoonsCsv: moonsBy(askedFigures),
+      findMarkers: ['?year=2027&from=06-10'],
       readDrift: ['?from=1500&to=2027'],
       exportDriftCsv: ['?from=1500&to=2027'],
-      readLook: Object.values(figures).map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),
-      printLook: Object.values(figures).map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),
-      compareVersions: [`?from=1&to=2`, '?from=1&to=draft', '?from=2&to=draft'],
-      readSheet: ['?layout=month-cards', '?layout=year-board'],
+      readLook: askedFigures.map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),
+      printLook: askedFigures.map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),
+      compareVersions: ['?from=1&to=1', '?from=1&to=2', '?from=2&to=draft'],
+      previewSheet: ['?layout=year-board'],
       printSheet: ['?layout=month-cards'],
       listAuditEvents: ['?limit=200'],
-      listNotes: [open, ...kept, ...Object.values(figures)].map(
-        ({ id }) =>
-          `?subjectType=${Object.values(figures).some((one) => one.id === id) ? 'figure' : 'entry'}&subjectId=${id}`,
-      ),
-      listAttachments: [{ id: openEntry?.entryId ?? '' }, ...kept, ...Object.values(figures)].map(
-        ({ id }) =>
-          `?subjectType=${Object.values(figures).some((figure) => figure.id === id) ? 'figure' : 'entry'}&subjectId=${id}`,
-      ),
+      listNotes: [...about('entry', looked), ...about('figure', askedFigures)],
+      listAttachments: [...about('entry', looked), ...about('figure', askedFigures)],
     },
   };
+}
+
+/** Moons numbered by a figure's first morning. */
+function moonsBy(figures: readonly LevelledFigure[]): string[] {
+  return figures.map(({ markerKey }) => `?year=2027&marker=${markerKey}&phenomenon=heliacal-rising`);
+}
+
+function ledBy({ markerKey }: LevelledFigure): Partial<EntryInput> {
+  const lead = { type: 'marker', markerKey, phenomenon: 'heliacal-rising', occurrence: 1 } as const;
+  return { kind: 'belief', lead, offsets: entryInput().offsets };
+}
+
+/** The village's to write, to answer and to sign. */
+function isVillages({ level, season }: Combination): boolean {
+  return (level === 'open' || level === 'village') && season === 'none';
+}
+
+/** Of the village's level, whatever was agreed: voices and pictures belong to these. */
+function isOfVillageAxis({ level, season }: Combination): boolean {
+  return level === 'village' && season === 'none';
+}
+
+async function answer(by: Client, version: Version, { id }: { id: string }, said: object): Promise<void> {
+  await by.put(`${versionPath(version)}/entries/${id}/answer`, said).expect(200);
+}
+
+/** On the open entry at every level; with the village on what was agreed about it in every way. */
+async function addFiles(entries: readonly LevelledEntry[], circle: Circle, plant: Plant): Promise<string[]> {
+  const open = expectFound(entries, plainAt('open'));
+  const ids: string[] = [];
+  for (const level of LEVELS) {
+    ids.push(...(await addLevelledFiles(circle, { entryId: open.id, level }, plainAt(level), plant)));
+  }
+  for (const { id, ...seen } of entries.filter(isOfVillageAxis)) {
+    if (seen.consent === 'nobody asked') continue;
+    ids.push(...(await addLevelledFiles(circle, { entryId: id, level: 'village' }, seen, plant)));
+  }
+  return ids;
+}
+
+/** What the giver then said about each; a consent that there is says so in words of its own. */
+async function settleConsents(
+  giver: Client,
+  entries: readonly LevelledEntry[],
+  figures: readonly LevelledFigure[],
+  plant: Plant,
+): Promise<string[]> {
+  const ids: string[] = [];
+  for (const [itemType, things] of [
+    ['entry', entries],
+    ['figure', figures],
+  ] as const) {
+    for (const { id, ...thing } of things) {
+      if (thing.consent === 'nobody asked' || thing.consent === 'paused') {
+        await settleConsent(giver, itemType, id, thing);
+        continue;
+      }
+      const said = agreed(plant(itemType === 'entry' ? 'consent' : 'figure consent', thing));
+      const consentId = await settleConsent(giver, itemType, id, thing, said);
+      if (consentId !== null && isLookedAt(thing) && itemType === 'entry') ids.push(consentId);
+    }
+  }
+  return ids;
 }
 
 /** The words that somebody gives with their yes. */
@@ -286,33 +273,11 @@ function agreed(word: string): Partial<ConsentContent> {
   return { giverName: word, spokeFor: word, conditions: word, benefits: word, explainedBy: word };
 }
 
-/** Who reads a published entry besides its giver. */
-function readers(content: EntryInput): string[] {
-  const group = content.sharingLevel === 'group' ? ['observer of the group'] : [];
-  return [...answerers(content), ...group];
-}
-
-/** Who reads what an elder said about an entry: its own people who see reviews. */
-function answerers({ sharingLevel, sharing }: EntryInput): string[] {
-  if (sharing?.tellingSeason) return [];
-  return { open: OFFICE, village: OFFICE, group: ['weaver'], elders: ['heir', 'weaver'], sealed: ['heir'] }[
-    sharingLevel
-  ];
-}
-
-function named(word: string, story: string, changes: Partial<FigureInput>): Partial<FigureInput> {
-  return {
-    names: [{ tag: 'en', name: word }],
-    story,
-    variants: [{ toldBy: story, text: story }],
-    ...changes,
-  };
-}
-
-/** Figures are the officers' to write down; here an elder is one for a moment. */
-async function addFigureBy(api: TestApi, elder: Client, changes: Partial<FigureInput>, word: string) {
-  await setRoles(api, elder, ['elder', 'officer']);
-  const figure = await addFigure(elder, named(word, word, changes));
-  await setRoles(api, elder, ['elder']);
-  return figure;
+function expectFound<T extends Combination>(things: readonly T[], wanted: Combination): T {
+  const found = things.find(
+    ({ level, season, consent }) =>
+      level === wanted.level && season === wanted.season && consent === wanted.consent,
+  );
+  if (found === undefined) throw new Error(`Nothing was made at ${JSON.stringify(wanted)}`);
+  return found;
 }

@@ -3,7 +3,9 @@ import { codeColumn, instantColumn } from './columns.js';
 import { CommunityEntity } from './community.entity.js';
 import { PersonEntity } from './person.entity.js';
 
-export type LetterKind = 'invitation' | 'password-reset' | 'review' | 'reminder' | 'digest';
+/** A new kind joins here, and the test that reads one of each. */
+export const LETTER_KINDS = ['invitation', 'password-reset', 'review', 'reminder', 'digest'] as const;
+export type LetterKind = (typeof LETTER_KINDS)[number];
 
 /**
  * `waiting` → `sending` → `sent`; back to `waiting` where nothing was handed over. `unsure`: the connection broke

@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm';
-import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
+import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { maySee, type Shared } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import type { Viewer } from '../../policy/viewer.js';
@@ -33,6 +33,16 @@ export async function seenAttachments(
     if (await maySeeSubject(manager, viewer, row)) seen.push({ row, shared: own });
   }
   return seen;
+}
+
+/** An attachment is nowhere without what it belongs to, whatever its own level says. */
+export async function seesWhatItIsAbout(
+  manager: EntityManager,
+  viewer: Viewer,
+  attachmentId: string,
+): Promise<boolean> {
+  const row = await manager.findOneBy(AttachmentEntity, { id: attachmentId });
+  return row !== null && maySeeSubject(manager, viewer, row);
 }
 
 function isWhole({ kind, parts }: AttachmentEntity): boolean {

@@ -10,6 +10,7 @@ import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import { appearance, maySeeByLevel, type Appearance } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
+import { isWithinSight } from '../sharing/within-sight.service.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
 
@@ -110,7 +111,10 @@ export async function subjectAppearances(
     const shared = await sharedById(manager, type, ids);
     for (const id of ids) {
       const thing = shared.get(id);
-      const seen = appearance(viewer, thing);
+      const own = appearance(viewer, thing);
+      const isThere =
+        own !== 'full' || (await isWithinSight(manager, viewer, { itemType: type, itemId: id }));
+      const seen = isThere ? own : 'none';
       // What only a missing yes hides leaves its records, without its name, to those who may see it by its level.
       found.set(`${type} ${id}`, seen === 'none' && maySeeByLevel(viewer, thing) ? 'blank' : seen);
     }

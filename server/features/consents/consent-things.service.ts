@@ -3,7 +3,7 @@ import { In, type EntityManager } from 'typeorm';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { figureIdOf } from '../../policy/entry-sight.js';
-import { maySeeByLevel, type Shared } from '../../policy/policy.js';
+import { maySee, maySeeByLevel, type Shared } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
@@ -18,6 +18,8 @@ export interface ConsentThing {
   shared: Shared;
   /** By its level: a thing that only its consent hides is still known to those who ask for it again. */
   isSeen: boolean;
+  /** Also by what was agreed: for everybody else a thing that a consent hides is not there. */
+  isShown: boolean;
   /** Null where it is not theirs to see, or has no name. */
   title: string | null;
   /** The giver, where they are one of the village's people: not whoever wrote down what somebody else gave. */
@@ -60,14 +62,21 @@ export async function consentThings(
   return ({ itemType, itemId }) => {
     const own = shared[itemType].get(itemId);
     if (own?.communityId !== viewer.communityId) return undefined;
-    // An entry is never wider than the village's own figure that it goes by.
-    const figureId = itemType === 'entry' ? ledBy(itemId) : null;
-    const isSeen =
-      maySeeByLevel(viewer, own) && (figureId === null || maySeeByLevel(viewer, shared.figure.get(figureId)));
+    // An entry is never wider than the village's own figure that it goes by, nor a story than its figure.
+    const figureId = { entry: ledBy, story: (id: string) => id, figure: none, attachment: none }[itemType](
+      itemId,
+    );
+    const both = figureId === null ? [own] : [own, shared.figure.get(figureId)];
+    const isSeen = both.every((one) => maySeeByLevel(viewer, one));
+    const isShown = both.every((one) => maySee(viewer, one));
     const title = itemType === 'entry' ? entries.get(itemId)?.titleOfficer : names.get(itemId);
     const content = itemType === 'entry' ? entries.get(itemId) : undefined;
     const giverName = content?.giver ?? '';
     const giverId = content?.giverId ?? (giverName === '' ? own.giverId : null);
-    return { shared: own, isSeen, title: isSeen ? (title ?? null) : null, giverId, giverName };
+    return { shared: own, isSeen, isShown, title: isSeen ? (title ?? null) : null, giverId, giverName };
   };
+}
+
+function none(): null {
+  return null;
 }

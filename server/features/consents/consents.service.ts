@@ -62,8 +62,9 @@ export class ConsentsService {
     });
     const thing = await this.thing(manager, actor, { itemType, itemId });
     const readable = (await this.describe(manager, actor, rows)).filter(({ may }) => may.read);
-    if (thing === undefined || (!thing.isSeen && readable.length === 0)) throw notFound();
+    if (thing === undefined) throw notFound();
     const asks = mayAsk(actor, thing);
+    if (!thing.isShown && !(asks && thing.isSeen) && readable.length === 0) throw notFound();
     const { giverId, giverName } = thing;
     const { level } = thing.shared;
     const names = await personNames(manager, [giverId, ...readable.map(({ row }) => row.recordedBy)]);

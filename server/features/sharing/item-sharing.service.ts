@@ -16,6 +16,7 @@ import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightne
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { isWithinSight } from './within-sight.service.js';
 import { toItemSharing } from './sharing.mapper.js';
 
 type Action = 'sharing-tightened' | 'wider-asked' | 'wider-agreed' | 'wider-dropped' | 'sharing-widened';
@@ -160,7 +161,8 @@ export class ItemSharingService {
     const viewer = await viewerOf(manager, actor, this.clock.now());
     if (row === null) throw notFound();
     const asked = row.asked !== null && row.communityId === actor.communityId && hasRole(actor, 'steward');
-    if (!maySee(viewer, row) && !asked) throw notFound();
+    const sees = maySee(viewer, row) && (await isWithinSight(manager, viewer, row));
+    if (!sees && !asked) throw notFound();
     return row;
   }
 

@@ -7,6 +7,7 @@ import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { maySee } from '../../policy/policy.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { isWithinSight } from '../sharing/within-sight.service.js';
 import { titlesOf } from './item-titles.service.js';
 import { appearanceUnhidden, couldSee, mayResume, mayTakeBack, othersUntil } from './taking-back.service.js';
 
@@ -23,7 +24,8 @@ export class ItemStatesService {
     if (row?.communityId !== actor.communityId || row.state === 'withdrawn') throw notFound();
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const mine = mayTakeBack(actor, viewer, row);
-    if (!mine && !maySee(viewer, row)) throw notFound();
+    const sees = maySee(viewer, row) && (await isWithinSight(manager, viewer, row));
+    if (!mine && !sees) throw notFound();
     const shared = row.state === 'shared';
     return {
       state: shared ? 'shared' : 'paused',
@@ -70,10 +72,12 @@ export class ItemStatesService {
   }
 
   /** Of what the person sees whenever it is not hidden. */
-  private seenTitles(viewer: Viewer, rows: readonly ItemSharingEntity[]): Promise<Map<string, string>> {
-    return titlesOf(
-      this.dataSource.manager,
-      rows.filter((row) => couldSee(viewer, row)),
-    );
+  private async seenTitles(viewer: Viewer, rows: readonly ItemSharingEntity[]): Promise<Map<string, string>> {
+    const { manager } = this.dataSource;
+    const seen: ItemSharingEntity[] = [];
+    for (const row of rows) {
+      if (couldSee(viewer, row) && (await isWithinSight(manager, viewer, row))) seen.push(row);
+    }
+    return titlesOf(manager, seen);
   }
 }

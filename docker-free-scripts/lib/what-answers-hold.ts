@@ -1,0 +1,172 @@
+import {
+  isKeeper,
+  isOfCircle,
+  isOnBoard,
+  mayBeOpened,
+  sees,
+  type Combination,
+  type Someone,
+} from './visibility-rules.js';
+
+/**
+ * What is given to the village and looked for in every answer. `led entry` goes by a figure, `later entry` stands in
+ * the draft and in the submission in review alone; `sound`, `picture` and `thumbnail` are the files themselves, for
+ * which `recording` and `picture title` stand in lists.
+ */
+export const PLANTED_KINDS = [
+  ...(['entry', 'led entry', 'later entry', 'variant', 'answer', 'note', 'figure', 'story'] as const),
+  ...(['consent', 'figure consent'] as const),
+  ...(['recording', 'sound', 'picture title', 'picture', 'thumbnail'] as const),
+] as const;
+export type PlantedKind = (typeof PLANTED_KINDS)[number];
+
+/** A word that stands in one thing alone; what that thing is, and how it is shared today. */
+export interface Planted extends Combination {
+  word: string;
+  kind: PlantedKind;
+}
+
+type Rule = (person: Someone, thing: Combination) => boolean;
+type Holds = Readonly<Partial<Record<PlantedKind, Rule>>>;
+
+/** Drafts, reviews and records: whoever compiles, reviews and signs, of what they see. */
+const keptSeen: Rule = (person, thing) => isKeeper(person) && sees(person, thing);
+/** Consents go on being read while they hide their thing; a pause hides the thing from them, too. */
+const agreedOn: Rule = (person, thing) =>
+  isKeeper(person) &&
+  isOfCircle(person, thing) &&
+  thing.consent !== 'nobody asked' &&
+  thing.consent !== 'paused';
+const opened: Rule = (person, thing) => sees(person, thing) && mayBeOpened(person, thing);
+const onBoard: Rule = (person, thing) => sees(person, thing) && isOnBoard(thing);
+const paused: Rule = (person, thing) =>
+  isKeeper(person) && isOfCircle(person, thing) && thing.consent === 'paused';
+const bringers: Rule = (person) => person === 'giver';
+const both =
+  (one: Rule, other: Rule): Rule =>
+  (person, thing) =>
+    one(person, thing) && other(person, thing);
+const either =
+  (one: Rule, other: Rule): Rule =>
+  (person, thing) =>
+    one(person, thing) || other(person, thing);
+/** The figure that an entry goes by. */
+const leading: Rule = (person, thing) => thing.level === 'elders' && sees(person, thing);
+
+/** Where one entry is asked for after the other, one for each value of an axis stands for all combinations. */
+export function isLookedAt({ level, season, consent }: Combination): boolean {
+  const isPlain = consent === 'nobody asked' && season === 'none';
+  return isPlain || (level === 'village' && (season === 'none' || consent === 'nobody asked'));
+}
+const looked = (rule: Rule): Rule => both((_person, thing) => isLookedAt(thing), rule);
+
+/** Figures whose sky is asked for one by one. */
+export function isAskedFigure({ level, season, consent }: Combination): boolean {
+  if (season !== 'none') return false;
+  const isPlain = consent === 'nobody asked' && ['village', 'group', 'elders'].includes(level);
+  return isPlain || consent === 'only to be kept';
+}
+const askedFigure = (rule: Rule): Rule => both((_person, thing) => isAskedFigure(thing), rule);
+
+const ALL_FIGURES: Holds = { figure: sees };
+const ONE_FIGURE: Holds = { figure: askedFigure(sees) };
+const ENTRIES: Holds = { entry: sees, 'led entry': sees, 'later entry': keptSeen, variant: sees };
+const BOARD: Holds = { entry: onBoard, 'later entry': both(keptSeen, onBoard) };
+const ONE_CONSENT: Holds = { consent: looked(agreedOn), entry: looked(agreedOn) };
+const TITLED_FILES: Holds = { recording: sees, 'picture title': sees };
+
+/**
+ * What of all that is planted the answers of each endpoint hold together, and for whom. A test asks for exactly this:
+ * neither a word more nor a word less.
+ */
+export const HOLDS: Readonly<Record<string, Holds>> = {
+  listStars: ALL_FIGURES,
+  exportStarsCsv: ALL_FIGURES,
+  listSkylineEffects: ALL_FIGURES,
+  findMarkers: ALL_FIGURES,
+  listMarkerNames: ALL_FIGURES,
+  readStar: ONE_FIGURE,
+  readDrift: ONE_FIGURE,
+  exportDriftCsv: ONE_FIGURE,
+  readLook: ONE_FIGURE,
+  printLook: ONE_FIGURE,
+  readStarAir: ONE_FIGURE,
+  readMoons: ALL_FIGURES,
+  exportMoonsCsv: ONE_FIGURE,
+  listFigures: { figure: sees, story: sees },
+  readFigure: { figure: sees, story: sees, 'led entry': keptSeen },
+  listEntries: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
+  listVariants: { variant: keptSeen },
+  readVersion: { ...ENTRIES, figure: leading },
+  compareVersions: ENTRIES,
+  listAnswers: { answer: keptSeen },
+  printSheet: BOARD,
+  previewSheet: BOARD,
+  listAttachments: TITLED_FILES,
+  readAttachment: TITLED_FILES,
+  readAttachmentPart: { sound: opened, picture: opened },
+  readAttachmentThumbnail: { thumbnail: opened },
+  listNotes: { note: sees },
+  readItemState: {
+    ...{ entry: looked(either(sees, paused)), 'led entry': sees, figure: askedFigure(sees) },
+    ...TITLED_FILES,
+  },
+  listPausedItems: { entry: paused, figure: paused },
+  listConsents: { consent: agreedOn, 'figure consent': agreedOn, entry: agreedOn, figure: agreedOn },
+  readItemConsents: {
+    ...{ entry: looked(either(sees, agreedOn)), 'led entry': sees, consent: looked(agreedOn) },
+    ...{ figure: askedFigure(either(sees, agreedOn)), 'figure consent': askedFigure(agreedOn) },
+  },
+  readConsent: ONE_CONSENT,
+  printConsentCard: ONE_CONSENT,
+  listAuditEvents: {
+    ...{ entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen, figure: keptSeen },
+    ...{ recording: keptSeen, 'picture title': keptSeen },
+  },
+  // What an elder asks the officer to change stands among what waits.
+  readToday: { entry: sees, answer: both((person) => person === 'officer', sees) },
+  // What somebody wrote and brought is theirs to have, also while it is hidden.
+  exportOwnData: { note: bringers, recording: bringers, 'picture title': bringers },
+};
+
+/** Why an endpoint holds nothing of what is planted. Every other one has its line above, or a test says so. */
+export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
+  readHealth: 'tells of the machine alone',
+  readOpenApi: 'is the contracts',
+  readSession: 'names the person and their villages',
+  listDevices: 'names browsers and times',
+  readPrivacy: 'names tables and purposes',
+  listCards: 'names people and times',
+  readLetterService: 'is a yes or no',
+  readLetterChoice: 'is the person’s own choice',
+  listStillToAsk: 'names people and submissions',
+  listCommunities: 'names villages',
+  readCommunity: 'is the village’s settings',
+  listPeople: 'names people',
+  listPlaces: 'is places and their skylines',
+  readPlace: 'is one place and its skyline',
+  findTimeZone: 'is a name of a zone',
+  listSkyMarkers: 'names signs of the Sun and of stars of the table',
+  readChart: 'is stars of the table',
+  listCalendars: 'counts what the person sees',
+  readCalendar: 'counts what the person sees',
+  listVersions: 'counts what the person sees',
+  listGroups: 'names groups and, to their people, members',
+  listAskedSharing: 'is levels and ids',
+  readSharing: 'is levels, people and ids',
+  listWithdrawn: 'is ids',
+  listSheetsToReplace: 'is numbers of versions',
+};
+
+/** The words that an endpoint has for somebody. */
+export function heldFor(endpointId: string, person: Someone, planted: readonly Planted[]): Planted[] {
+  return planted.filter((thing) => holds(endpointId, person, thing));
+}
+
+export function holds(
+  endpointId: string,
+  person: Someone,
+  { kind, ...thing }: Combination & { kind: PlantedKind },
+): boolean {
+  return HOLDS[endpointId]?.[kind]?.(person, thing) === true;
+}
