@@ -1,4 +1,5 @@
 import { Trans, useTranslation } from 'react-i18next';
+import { BoardLine } from '#src/lib/board-line.js';
 import { useGiverWords } from '#src/lib/giver-words.js';
 import { KeptChip } from '#src/lib/level-chip.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
@@ -95,6 +96,7 @@ export function EntryView({
         <section className="grid gap-2">
           <h2>{t('variants:title')}</h2>
           <p className="text-small text-umber-soft">{t('variants:lead')}</p>
+          <BoardLine entry={entry} />
           <VariantList
             variants={entry.variants}
             year={header.year}

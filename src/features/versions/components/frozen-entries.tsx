@@ -3,12 +3,11 @@ import { useTranslation } from 'react-i18next';
 import { boardOf } from '#shared/calendar/variants.js';
 import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
-import { useCurrentCommunity } from '#src/lib/community.js';
+import { BoardLine } from '#src/lib/board-line.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
 import { VariantList } from '#src/lib/variant-list.js';
-import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { KeptLine } from '#src/lib/kept-line.js';
 import { KeptChip } from '#src/lib/level-chip.js';
 import { More } from '#src/ui/fold.js';
@@ -54,6 +53,7 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
   const dateWords = useDateWords();
   const { content, dates } = entry;
   const { year } = header;
+  const board = boardOf(entry).window;
   return (
     <div className="frozen-entry">
       <SignIcon sign={content.icon} size={34} />
@@ -72,11 +72,11 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
           <strong>{words.window(content, dates.window, year)}</strong>
         </p>
         <p className="range-line">{words.lead(content, markers)}</p>
-        {dates.window && (
+        {board && (
           <WindowBar
             className="mt-2"
             span={{ first: dayNumberOf(year, 1, 1), last: dayNumberOf(year, 12, 31) }}
-            days={windowDayNumbers(dates.window)}
+            days={windowDayNumbers(board)}
             kind={content.protectiveWatch ? 'watch' : 'work'}
             label=""
             height={9}
@@ -96,20 +96,11 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
 
 /** Other keepers' timings, and the days by which the board goes where they are not the entry's own. */
 function BesideIt({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
-  const { t } = useTranslation('variants');
-  const words = useEntryWords();
-  const { variants, content } = entry;
-  if (variants === undefined) return null;
-  const { window, drivenBy } = boardOf(entry);
+  if (entry.variants === undefined) return null;
   return (
     <div className="mt-2 grid gap-2">
-      {drivenBy !== 'entry' && (
-        <p>
-          {window ? t('board.days', { days: words.windowSentence(window) }) : t('board.noDays')}
-          {content.board !== undefined && ` ${t('board.reasonShown', { reason: content.board.reason })}`}
-        </p>
-      )}
-      <VariantList variants={variants} year={year} markers={markers} />
+      <BoardLine entry={entry} />
+      <VariantList variants={entry.variants} year={year} markers={markers} />
     </div>
   );
 }
@@ -118,16 +109,9 @@ const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
 
 function EntryRest({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
   const { t } = useTranslation('versions');
-  const { communityId } = useCurrentCommunity();
   const facts = useEntryFacts().groups(entry.content, entry.dates, year, markers);
   return (
     <More label={t('page.moreOfIt')}>
-      <TakeBackLink
-        communityId={communityId}
-        itemType="entry"
-        itemId={entry.entryId}
-        about={entry.content.titleOfficer}
-      />
       <dl>
         {GROUPS.flatMap((group) => facts[group]).map(({ key, label, value }) => (
           <div key={key} className="fact">

@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
+import { boardOf } from '#shared/calendar/variants.js';
 import type { FrozenMarker, Version } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -14,7 +15,7 @@ import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
 import { YearBoard } from '#src/ui/pictures/year-board.js';
 
-/** The year of a frozen version; on a phone each entry carries its own line instead. */
+/** The year of a frozen version, by the days that the board goes by; on a phone each entry carries its own line instead. */
 export function FrozenStrip({ version }: { version: Version }) {
   const { t } = useTranslation(['versions', 'calendars']);
   const dates = useDateWords();
@@ -44,18 +45,19 @@ export function FrozenStrip({ version }: { version: Version }) {
           })),
           ...signLanes,
         ]}
-        bars={entries.flatMap(({ entryId, content, dates: found }) =>
-          found.window
+        bars={entries.flatMap((entry) => {
+          const { window } = boardOf(entry);
+          return window
             ? [
                 {
-                  key: entryId,
-                  name: content.titleOfficer,
-                  days: windowDayNumbers(found.window),
-                  kind: content.protectiveWatch ? ('watch' as const) : ('work' as const),
+                  key: entry.entryId,
+                  name: entry.content.titleOfficer,
+                  days: windowDayNumbers(window),
+                  kind: entry.content.protectiveWatch ? ('watch' as const) : ('work' as const),
                 },
               ]
-            : [],
-        )}
+            : [];
+        })}
         barsName={t('page.work')}
         label={t('page.picture', { year, count: entries.length })}
         today={dayNumberOf(today.year, today.month, today.day)}
