@@ -29,7 +29,15 @@ export const ATTACHMENT_KINDS = ['recording', 'picture'] as const;
 export type AttachmentKind = (typeof ATTACHMENT_KINDS)[number];
 
 /** What a recording or a picture belongs to. It is never shown to anybody who may not see that. */
-export const ATTACHMENT_SUBJECTS = ['entry', 'figure', 'answer', 'marker', 'consent', 'meeting'] as const;
+export const ATTACHMENT_SUBJECTS = [
+  'entry',
+  'figure',
+  'answer',
+  'marker',
+  'consent',
+  'meeting',
+  'note',
+] as const;
 export type AttachmentSubjectType = (typeof ATTACHMENT_SUBJECTS)[number];
 
 /** Before anybody chooses: what was spoken is for the elders and leaves no trace, what was photographed for the village. */
@@ -47,7 +55,7 @@ export type ConsentWay = (typeof CONSENT_WAYS)[number];
 
 const subjectFields = z.strictObject({
   subjectType: z.enum(ATTACHMENT_SUBJECTS),
-  /** The id of an entry, a figure or an answer, or the key of a marker. */
+  /** The id of an entry, a figure, an answer, a consent or a note, or the key of a marker. */
   subjectId: z.string().max(64, 'too-long'),
 });
 

@@ -60,7 +60,9 @@ const words = text(NOTE_MAX).refine((said) => said !== '', 'required');
 export const noteInput = subjectFields
   .extend({
     pin: notePin,
-    text: words,
+    text: text(NOTE_MAX),
+    /** Said instead of written: without words until its recording comes, and then for whoever reads the note. */
+    isSpoken: z.boolean(),
     /** `village`: whoever sees its subject; `elders`: the elders among them. */
     level: noteLevel,
   })
@@ -68,6 +70,9 @@ export const noteInput = subjectFields
   .superRefine(({ subjectType, pin }, context) => {
     const fits = pin.at === 'whole' || subjectType === 'entry' || pin.at === 'words';
     if (!fits) context.addIssue({ code: 'custom', path: ['pin'], message: 'not-in-list' });
+  })
+  .superRefine(({ text: said, isSpoken }, context) => {
+    if (said === '' && !isSpoken) context.addIssue({ code: 'custom', path: ['text'], message: 'required' });
   });
 export type NoteInput = z.infer<typeof noteInput>;
 
@@ -86,7 +91,12 @@ export type NoteAnswer = z.infer<typeof noteAnswer>;
 export const note = subjectFields.extend({
   id,
   pin: notePin,
+  /** False where the words that it is pinned to no longer stand in the text: it was changed since. */
+  wordsStand: z.boolean(),
+  /** Empty where it was spoken. */
   text: z.string(),
+  /** Recordings that belong to it, as far as the person may hear of them. */
+  voices: z.number().int().min(0),
   level: sharingLevel,
   authorName: z.string(),
   writtenAt: instant,

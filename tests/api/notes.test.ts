@@ -12,9 +12,13 @@ import {
   submit,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addPart, addRecording, attachmentsPath, recordingInput } from '#tests/support/attachment-api.js';
+import { webm } from '#tests/support/media.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { addNote, noteInput, notesOn, notesPath } from '#tests/support/notes-api.js';
 import { addGroup, details, sharingPath } from '#tests/support/sharing-api.js';
+
+const LATE = 'Then sow the\nshort millet.';
 
 let api: TestApi;
 let village: Village;
@@ -33,12 +37,12 @@ afterAll(() => api.close());
 
 describe('a note', () => {
   it('is pinned to the whole, the window, the marker or a word of an entry, by whoever sees it', async () => {
-    const { id } = await addEntry(village.officer, calendar.id);
+    const { id } = await addEntry(village.officer, calendar.id, { ifLate: LATE });
     const pins = [
       { at: 'whole' },
       { at: 'window' },
       { at: 'marker' },
-      { at: 'words', field: 'ifLate', quote: 'short millet' },
+      { at: 'words', field: 'ifLate', quote: 'the short millet' },
     ] as const;
     for (const pin of pins) await addNote(village.elder, { subjectId: id, pin });
     const notes = await notesOn(village.officer, 'entry', id);
@@ -80,6 +84,93 @@ describe('a note', () => {
     await addNote(observer, { subjectType: 'marker', subjectId: 'pleiades', text: 'Seen late here.' });
     expect(await notesOn(village.elder2, 'figure', figure.id)).toHaveLength(1);
     expect(await notesOn(village.elder2, 'marker', 'pleiades')).toHaveLength(1);
+  });
+});
+
+describe('the words that a note is pinned to', () => {
+  const pinned = (quote: string) => ({ pin: { at: 'words', field: 'ifLate', quote } }) as const;
+
+  it('stand in the text as its writer sees it, or the note is refused', async () => {
+    const { id } = await addEntry(village.officer, calendar.id);
+    const made = await village.elder
+      .post(notesPath(village.elder), noteInput({ subjectId: id, ...pinned('never said') }))
+      .expect(422);
+    expect(made.body).toMatchObject({ errors: [{ field: 'pin', code: 'words-not-there' }] });
+  });
+
+  it('are not guessed in a story that is not for whoever guesses', async () => {
+    const figure = await addFigure(village.officer, { story: 'The quiet bowl', storyLevel: 'sealed' });
+    const about = { subjectType: 'figure', subjectId: figure.id } as const;
+    const pin = { at: 'words', field: 'story', quote: 'quiet bowl' } as const;
+    await addNote(village.officer, { ...about, pin });
+    const guess = await village.elder.post(notesPath(village.elder), noteInput({ ...about, pin }));
+    expect(guess.body).toMatchObject({ errors: [{ field: 'pin', code: 'words-not-there' }] });
+  });
+
+  it('have changed since, once the text says something else', async () => {
+    const entry = await addEntry(village.officer, calendar.id, { ifLate: LATE });
+    await addNote(village.elder, { subjectId: entry.id, ...pinned('short millet') });
+    expect((await notesOn(village.elder, 'entry', entry.id))[0]?.wordsStand).toBe(true);
+    const content = { ...entry.content, ifLate: 'Sow nothing.' };
+    await village.officer
+      .put(`/api/calendars/${calendar.id}/entries/${entry.id}`, { content, version: entry.version })
+      .expect(200);
+    expect((await notesOn(village.elder, 'entry', entry.id))[0]?.wordsStand).toBe(false);
+  });
+});
+
+describe('a spoken note', () => {
+  const said = { subjectType: 'note', sharingLevel: 'village' } as const;
+
+  it('is its writer’s alone until its recording has come whole', async () => {
+    const { id } = await addEntry(village.officer, calendar.id);
+    const note = await addNote(village.elder, { subjectId: id, text: '', isSpoken: true });
+    expect(await notesOn(village.officer, 'entry', id)).toEqual([]);
+    const recording = await addRecording(village.elder, note.id, said, []);
+    expect(await notesOn(village.officer, 'entry', id)).toEqual([]);
+    await addPart(village.elder, recording.id, 1, 'my note');
+    expect(await notesOn(village.officer, 'entry', id)).toMatchObject([{ text: '', voices: 1 }]);
+    const heard = await village.officer.get(`/api/attachments/${recording.id}/parts/1`);
+    expect(heard.status).toBe(200);
+  });
+
+  it('is answered by voice, by whoever reads it', async () => {
+    const { id } = await addEntry(village.officer, calendar.id);
+    const note = await addNote(village.elder, { subjectId: id });
+    await addRecording(village.officer, note.id, said);
+    expect(await notesOn(village.elder, 'entry', id)).toMatchObject([{ voices: 1 }]);
+  });
+
+  it('is heard by nobody who does not read the note, whatever the recording says of itself', async () => {
+    const { id } = await addEntry(village.officer, calendar.id);
+    const note = await addNote(village.elder, { subjectId: id, level: 'elders' });
+    const recording = await addRecording(village.elder, note.id, said);
+    for (const path of [`/api/attachments/${recording.id}`, `/api/attachments/${recording.id}/parts/1`]) {
+      expect((await village.elder2.get(path)).status).toBe(200);
+      expect(reasonOf(await village.officer.get(path))).toBe('404 not-found');
+    }
+    const own = recordingInput({ ...said, subjectId: note.id });
+    const sent = await village.officer.upload(attachmentsPath(village.officer), own, webm({ note: 'I' }));
+    expect(reasonOf(sent)).toBe('404 not-found');
+  });
+
+  it('goes with its note, and with what the note is about', async () => {
+    const entry = await addEntry(village.officer, calendar.id, { giverId: village.elder.personId });
+    const notes = [
+      await addNote(village.elder, { subjectId: entry.id }),
+      await addNote(village.elder2, { subjectId: entry.id }),
+    ];
+    await addRecording(village.elder, notes[0]?.id ?? '', said);
+    await addRecording(village.elder2, notes[1]?.id ?? '', said);
+    const takeBack = (type: string, id: string) =>
+      village.elder.post(`/api/communities/${village.elder.communityId}/items/${type}/${id}/withdrawal`, {
+        leavesTrace: false,
+        askedById: null,
+      });
+    expect((await takeBack('note', notes[0]?.id ?? '')).status).toBeLessThan(300);
+    expect(await api.dataSource.query('SELECT id FROM attachment')).toHaveLength(1);
+    expect((await takeBack('entry', entry.id)).status).toBeLessThan(300);
+    expect(await api.dataSource.query('SELECT storage_key FROM attachment_part')).toEqual([]);
   });
 });
 

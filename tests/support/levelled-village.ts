@@ -24,6 +24,7 @@ import {
   VILLAGE_THINGS,
   type LevelledFigure,
 } from './levelled-things.js';
+import { addRecording } from './attachment-api.js';
 import { addNote } from './notes-api.js';
 import { addGroup } from './sharing-api.js';
 
@@ -126,7 +127,11 @@ export async function furnishLevels(
   for (const { id, ...entry } of looked) {
     await addNote(elder, { subjectId: id, text: plant('note', entry) });
   }
-  await addNote(elder, { subjectId: open.id, text: plant('note', plainAt('elders')), level: 'elders' });
+  const forElders = plant('note', plainAt('elders'));
+  const note = await addNote(elder, { subjectId: open.id, text: forElders, level: 'elders' });
+  const spoken = plant('recording to a note for the elders', plainAt('elders'));
+  const heard = { title: spoken, speaker: spoken, sharingLevel: 'village' } as const;
+  attachmentIds.push((await addRecording(elder, note.id, { subjectType: 'note', ...heard })).id);
   const elders = figureAt('elders');
   await addNote(elder, {
     ...{ subjectType: 'figure', subjectId: elders.id },
@@ -173,7 +178,7 @@ export async function furnishLevels(
       groupId: [group.id],
       variantId: variantIds,
       consentId: consentIds,
-      noteId: [randomUUID()],
+      noteId: [note.id],
       withdrawalId: [randomUUID()],
       attachmentId: attachmentIds,
       part: ['0', '1'],
@@ -200,7 +205,11 @@ export async function furnishLevels(
       printSheet: ['?layout=month-cards'],
       listAuditEvents: ['?limit=200'],
       listNotes: [...about('entry', looked), ...about('figure', askedFigures)],
-      listAttachments: [...about('entry', looked), ...about('figure', askedFigures)],
+      listAttachments: [
+        ...about('entry', looked),
+        ...about('figure', askedFigures),
+        ...about('note', [note]),
+      ],
     },
   };
 }

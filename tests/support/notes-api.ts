@@ -7,6 +7,7 @@ export function noteInput(changes: Partial<NoteInput> = {}): NoteInput {
     subjectId: '',
     pin: { at: 'whole' },
     text: 'We do this a week later.',
+    isSpoken: false,
     level: 'village',
     ...changes,
   };

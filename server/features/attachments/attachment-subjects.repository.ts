@@ -12,6 +12,7 @@ import type { Viewer } from '../../policy/viewer.js';
 import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { readableConsent } from '../consents/readable-consent.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
+import { readsNote } from '../notes/note-access.service.js';
 
 type Look = (manager: EntityManager, viewer: Viewer, id: string) => Promise<boolean>;
 
@@ -57,6 +58,7 @@ const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
   marker: async (manager, viewer, key) => resolveMarker(key, await figuresSeenBy(manager, viewer)) !== null,
   /** Proof of a consent is for those who read the consent. */
   consent: readableConsent,
+  note: readsNote,
 };
 
 export async function maySeeSubject(

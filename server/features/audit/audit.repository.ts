@@ -65,10 +65,9 @@ const NAMES: Readonly<
     ),
   attachment: async (manager, ids) =>
     new Map(
-      (await manager.findBy(AttachmentEntity, { id: In(ids) })).map(({ id, title, speaker }) => [
-        id,
-        title || speaker,
-      ]),
+      (await manager.findBy(AttachmentEntity, { id: In(ids) })).flatMap(({ id, title }) =>
+        title === '' ? [] : [[id, title] as const],
+      ),
     ),
   version: async (manager, ids) =>
     new Map(

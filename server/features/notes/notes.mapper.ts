@@ -8,17 +8,21 @@ export interface NoteFacts {
   /** Oldest first. */
   answers: readonly NoteAnswerEntity[];
   level: SharingLevel;
+  wordsStand: boolean;
+  voices: number;
   names: ReadonlyMap<string, string>;
   askingId: string;
 }
 
-export function toNote({ row, answers, level, names, askingId }: NoteFacts): Note {
+export function toNote({ row, answers, level, wordsStand, voices, names, askingId }: NoteFacts): Note {
   return {
     id: row.id,
     subjectType: row.subjectType,
     subjectId: row.subjectId,
     pin: row.pin,
+    wordsStand,
     text: row.text,
+    voices,
     level,
     authorName: names.get(row.authorId) ?? '',
     writtenAt: row.writtenAt.toISOString(),

@@ -7,23 +7,30 @@ import {
   type NoteInput,
   type NoteSubject,
 } from '#shared/contracts/notes.js';
-import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { PLAIN_DETAILS, type SharingLevel } from '#shared/contracts/sharing.js';
 import { randomUUID } from 'node:crypto';
 import { In, type DataSource, type EntityManager } from 'typeorm';
 import { NoteAnswerEntity } from '../../db/entities/note-answer.entity.js';
 import { NoteEntity } from '../../db/entities/note.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
-import { conflict, notFound } from '../../http/app-error.js';
+import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { figureIdOf } from '../../policy/entry-sight.js';
 import { maySee } from '../../policy/policy.js';
 import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
-import { viewerOf } from '../../policy/viewer.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { voicesOfNotes, type NoteVoices } from '../attachments/note-voices.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { personNames } from '../people/person-names.service.js';
-import { seesNoteSubject } from './note-subjects.service.js';
+import { hasQuote, notedTexts, type NotedTexts } from './note-subjects.service.js';
 import { toNote } from './notes.mapper.js';
+
+interface SeenNote {
+  row: NoteEntity;
+  level: SharingLevel;
+  voices: NoteVoices;
+}
 
 /**
  * Remarks pinned to things. A note is seen by those who see its subject now and whom its own level names: it can be
@@ -46,12 +53,16 @@ export class NotesService {
     return this.describe(manager, actor, rows);
   }
 
-  async add(actor: Actor, { level, ...input }: NoteInput): Promise<Note> {
+  async add(actor: Actor, { level, isSpoken: _isSpoken, ...input }: NoteInput): Promise<Note> {
     const { communityId, person } = actor;
     const { subjectType, subjectId } = input;
     const id = randomUUID();
     return inTransaction(this.dataSource, async (manager) => {
-      await this.expectSubject(manager, actor, input);
+      const texts = await this.expectSubject(manager, actor, input);
+      const { pin } = input;
+      if (pin.at === 'words' && !texts.some((each) => hasQuote(each, pin.field, pin.quote))) {
+        throw invalidField('pin', 'words-not-there');
+      }
       const count = await manager.countBy(NoteEntity, { communityId, subjectType, subjectId });
       if (count >= NOTES_PER_SUBJECT_MAX) throw conflict('too-many-notes');
       const writtenAt = this.clock.now();
@@ -130,21 +141,32 @@ export class NotesService {
   }
 
   /** Somebody who does not see what a note is about learns nothing of it, nor whether there is one. */
-  private async expectSubject(manager: EntityManager, actor: Actor, subject: NoteSubject): Promise<void> {
-    const viewer = await viewerOf(manager, actor, this.clock.now());
-    if (!(await seesNoteSubject(manager, actor, viewer, subject))) throw notFound();
+  private async expectSubject(
+    manager: EntityManager,
+    actor: Actor,
+    subject: NoteSubject,
+  ): Promise<NotedTexts[]> {
+    const texts = await notedTexts(manager, await this.viewer(manager, actor), subject);
+    if (texts === null) throw notFound();
+    return texts;
   }
 
-  private async seen(manager: EntityManager, actor: Actor, rows: readonly NoteEntity[]) {
-    const viewer = await viewerOf(manager, actor, this.clock.now());
-    const shared = await sharedById(
-      manager,
-      'note',
-      rows.map(({ id }) => id),
-    );
+  private viewer(manager: EntityManager, actor: Actor): Promise<Viewer> {
+    return viewerOf(manager, actor, this.clock.now());
+  }
+
+  /** A note that was to be spoken is its writer's alone until it has been. */
+  private async seen(manager: EntityManager, actor: Actor, rows: readonly NoteEntity[]): Promise<SeenNote[]> {
+    const viewer = await this.viewer(manager, actor);
+    const ids = rows.map(({ id }) => id);
+    const shared = await sharedById(manager, 'note', ids);
+    const voicesOf = await voicesOfNotes(manager, viewer, ids);
     return rows.flatMap((row) => {
       const own = shared.get(row.id);
-      return own !== undefined && maySee(viewer, own) ? [{ row, level: own.level }] : [];
+      const voices = voicesOf(row.id);
+      if (own === undefined || !maySee(viewer, own)) return [];
+      if (row.text === '' && !voices.isSaid && row.authorId !== viewer.personId) return [];
+      return [{ row, level: own.level, voices }];
     });
   }
 
@@ -160,19 +182,31 @@ export class NotesService {
       where: { noteId: In(seen.map(({ row }) => row.id)) },
       order: { writtenAt: 'ASC', id: 'ASC' },
     });
+    const newest = await this.newestTexts(manager, actor, rows);
     const names = await personNames(manager, [
       ...seen.map(({ row }) => row.authorId),
       ...answers.map(({ authorId }) => authorId),
     ]);
-    return seen.map(({ row, level }) =>
+    return seen.map(({ row, level, voices }) =>
       toNote({
         row,
         level,
+        wordsStand: row.pin.at !== 'words' || hasQuote(newest, row.pin.field, row.pin.quote),
+        voices: voices.heard,
         names,
         answers: answers.filter(({ noteId }) => noteId === row.id),
         askingId: actor.person.id,
       }),
     );
+  }
+
+  /** Notes are read one subject at a time: whether quoted words stand is asked of its text as it is now. */
+  private async newestTexts(
+    manager: EntityManager,
+    actor: Actor,
+    [first]: readonly NoteEntity[],
+  ): Promise<NotedTexts | undefined> {
+    return first === undefined ? undefined : (await this.expectSubject(manager, actor, first))[0];
   }
 
   /** In the records it belongs to what it is about, so that it shows there to the same people. */

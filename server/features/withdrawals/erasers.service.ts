@@ -51,7 +51,7 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       return { published: await eraseFrozenVariant(manager, itemId) };
     }),
     async (manager, { itemType, itemId }) =>
-      itemType === 'entry' || itemType === 'figure'
+      itemType === 'entry' || itemType === 'figure' || itemType === 'note'
         ? attached(await eraseAttachmentsOf(manager, itemType, [itemId]))
         : {},
     only('note', async (manager, { itemId }) => {

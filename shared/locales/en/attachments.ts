@@ -3,6 +3,7 @@ export const texts = {
   title: 'Voices and pictures',
   none: 'Nobody has added a voice or a picture yet.',
   record: 'Record a voice',
+  speak: 'Say something to it',
   addPicture: 'Add a picture',
   about: {
     title: 'Who speaks?',
@@ -10,6 +11,7 @@ export const texts = {
     speakerHint: 'As they wish to be called: a name, a role, or a made-up name.',
     language: 'Language',
     level: 'Who may hear it?',
+    sameCircle: 'Whoever reads the note may hear it.',
     next: 'On to the spoken agreement',
   },
   circle: {

@@ -8,6 +8,7 @@ import type { SharingValue } from '#src/lib/sharing-fields.js';
 import type { ItemRef } from '#src/lib/sharing-queries.js';
 import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { Board } from '#src/ui/surfaces.js';
+import { VoicesOfNote } from './voices-of-note.js';
 
 export interface AboutItemProps {
   item: ItemRef & { itemType: 'entry' | 'figure' };
@@ -40,6 +41,7 @@ export function AboutItem({ item, texts, look = 'boards', ...sharing }: AboutIte
           key={itemId}
           thing={{ communityId, subjectType: itemType, subjectId: itemId }}
           texts={texts}
+          voices={(note, begins) => <VoicesOfNote communityId={communityId} note={note} begins={begins} />}
         />
       </Part>
       <Part look={look} title={t('title')}>

@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next';
+import { VoicesOfNote } from '#src/app/items/voices-of-note.js';
 import { NotesPanel } from '#src/features/notes/components/notes-panel.js';
 import { StarPage } from '#src/features/stars/components/star-page.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
@@ -18,6 +19,7 @@ function StarNotes({ markerKey }: { markerKey: string }) {
         key={markerKey}
         thing={{ communityId, subjectType: 'marker', subjectId: markerKey }}
         texts={[]}
+        voices={(note, begins) => <VoicesOfNote communityId={communityId} note={note} begins={begins} />}
       />
     </Board>
   );

@@ -12,18 +12,29 @@ import type { Recorder } from '../model/use-recorder.js';
 import { CircleFields } from './circle-fields.js';
 
 /** Who speaks, in which language, and who may hear it. */
-export function AboutStep({ recorder, communityId }: { recorder: Recorder; communityId: string }) {
+export function AboutStep({
+  recorder,
+  communityId,
+  fixed,
+}: {
+  recorder: Recorder;
+  communityId: string;
+  /** Who hears it, where that is not to be chosen. */
+  fixed: SharingOfAttachment | undefined;
+}) {
   const { t } = useTranslation('attachments');
   const words = useProblemWords();
   const { data: community } = useQuery(communityQuery(communityId));
   const languages = community ? [community.villageLanguage, community.officerLanguage] : [];
   const [speaker, setSpeaker] = useState(useSession().person?.displayName ?? '');
   const [language, setLanguage] = useState<string | null>(null);
-  const [circle, setCircle] = useState<SharingOfAttachment>({
-    sharingLevel: DEFAULT_SHARING.recording.level,
-    sharing: DEFAULT_SHARING.recording.details,
-    giverId: null,
-  });
+  const [circle, setCircle] = useState<SharingOfAttachment>(
+    fixed ?? {
+      sharingLevel: DEFAULT_SHARING.recording.level,
+      sharing: DEFAULT_SHARING.recording.details,
+      giverId: null,
+    },
+  );
   const [isChecked, setIsChecked] = useState(false);
   const needsGroup = circle.sharingLevel === 'group' && circle.sharing.groupId === null;
   const chosen = language ?? languages[0]?.tag ?? '';
@@ -63,12 +74,16 @@ export function AboutStep({ recorder, communityId }: { recorder: Recorder; commu
           </option>
         ))}
       </SelectField>
-      <CircleFields
-        label={t('about.level')}
-        value={circle}
-        groupProblem={isChecked && needsGroup ? words.field('choose-group') : undefined}
-        onChange={setCircle}
-      />
+      {fixed === undefined ? (
+        <CircleFields
+          label={t('about.level')}
+          value={circle}
+          groupProblem={isChecked && needsGroup ? words.field('choose-group') : undefined}
+          onChange={setCircle}
+        />
+      ) : (
+        <p className="text-umber-soft">{t('about.sameCircle')}</p>
+      )}
       <Button type="submit" look="main" full>
         {t('about.next')}
       </Button>

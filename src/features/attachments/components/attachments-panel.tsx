@@ -1,19 +1,14 @@
-import { useQuery } from '@tanstack/react-query';
 import { ImagePlus, Mic } from 'lucide-react';
 import { useId, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { AttachmentSubject } from '#shared/contracts/attachments.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
 import { useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { classNames } from '#src/ui/class-names.js';
-import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
-import { attachmentsQuery } from '../api/attachments-api.js';
 import { useKeptRecordings, type Unsent } from '../model/use-kept-recordings.js';
-import { PictureCard } from './picture-card.js';
+import { KeptAttachments } from './kept-attachments.js';
 import { PictureForm } from './picture-form.js';
-import { RecordingCard } from './recording-card.js';
 import { UnsentNotice } from './unsent-notice.js';
 import { VoiceRecorder } from './voice-recorder.js';
 
@@ -80,31 +75,7 @@ export function AttachmentsPanel({ communityId, subject, look = 'board' }: Attac
           </Button>
         </div>
       )}
-      <Kept communityId={communityId} subject={subject} isQuiet={doing !== null} />
+      <KeptAttachments communityId={communityId} subject={subject} isQuiet={doing !== null} />
     </section>
-  );
-}
-
-function Kept({ communityId, subject, isQuiet }: AttachmentsPanelProps & { isQuiet: boolean }) {
-  const { t } = useTranslation('attachments');
-  const words = useProblemWords();
-  const { data, error, refetch } = useQuery(attachmentsQuery(communityId, subject));
-  if (data === undefined) {
-    if (error === null) return <Skeleton lines={2} />;
-    return <TroubleNote sentence={words.problem(error)} onRetry={() => void refetch()} />;
-  }
-  if (data.length === 0) return isQuiet ? null : <p className="text-umber-soft">{t('none')}</p>;
-  return (
-    <ul className="grid gap-4">
-      {data.map((attachment) => (
-        <li key={attachment.id}>
-          {attachment.kind === 'picture' ? (
-            <PictureCard attachment={attachment} />
-          ) : (
-            <RecordingCard attachment={attachment} />
-          )}
-        </li>
-      ))}
-    </ul>
   );
 }

@@ -4,6 +4,7 @@ import type { Attachment, AttachmentSubject } from '#shared/contracts/attachment
 import { useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
+import type { SharingOfAttachment } from '../model/kept-recordings.js';
 import type { Unsent } from '../model/use-kept-recordings.js';
 import { recordingClosed } from '../model/use-microphone.js';
 import { useRecorder, type RecorderStep } from '../model/use-recorder.js';
@@ -16,6 +17,8 @@ interface VoiceRecorderProps {
   subject: AttachmentSubject;
   /** One that was found on this device; null to begin anew. */
   found: Unsent | null;
+  /** Who hears it, where that is not to be chosen. */
+  circle?: SharingOfAttachment | undefined;
   /** Sent, thrown away, or left for later. */
   onDone: () => void;
   /** It is with the village now. */
@@ -30,7 +33,14 @@ const TITLES = {
 } as const satisfies Record<RecorderStep, string>;
 
 /** Who speaks – the agreement – record – stop – listen – keep. One step at a time. */
-export function VoiceRecorder({ communityId, subject, found, onDone, onKept }: VoiceRecorderProps) {
+export function VoiceRecorder({
+  communityId,
+  subject,
+  circle,
+  found,
+  onDone,
+  onKept,
+}: VoiceRecorderProps) {
   const { t } = useTranslation(['attachments', 'common']);
   const personId = useSession().person?.id ?? '';
   const recorder = useRecorder({ ...subject, communityId, personId, found });
@@ -49,7 +59,7 @@ export function VoiceRecorder({ communityId, subject, found, onDone, onKept }: V
         </Care>
       ) : (
         <>
-          {step === 'about' && <AboutStep recorder={recorder} communityId={communityId} />}
+          {step === 'about' && <AboutStep recorder={recorder} communityId={communityId} fixed={circle} />}
           {step === 'consent' && <ConsentStep recorder={recorder} />}
           {step === 'voice' && <VoiceStep recorder={recorder} />}
         </>

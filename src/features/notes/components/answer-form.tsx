@@ -1,7 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
+import type { ChangeEvent } from 'react';
 import { useForm } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import { noteAnswerInput, type NoteAnswerInput } from '#shared/contracts/notes.js';
+import type { DraftKeeper } from '#src/lib/kept-draft.js';
 import { useFormProblems } from '#src/lib/form-problems.js';
 import { Button } from '#src/ui/button.js';
 import { TextAreaField } from '#src/ui/field.js';
@@ -13,17 +15,22 @@ const FIELDS = ['text'] as const;
 export interface AnswerFormProps {
   thing: NotedThing;
   noteId: string;
+  keeper: DraftKeeper<string>;
   onDone: () => void;
 }
 
-export function AnswerForm({ thing, noteId, onDone }: AnswerFormProps) {
+export function AnswerForm({ thing, noteId, keeper, onDone }: AnswerFormProps) {
   const { t } = useTranslation(['notes', 'common']);
   const answer = useAnswerNote(thing);
-  const form = useForm({ resolver: zodResolver(noteAnswerInput), defaultValues: { text: '' } });
+  const form = useForm({
+    resolver: zodResolver(noteAnswerInput),
+    defaultValues: { text: keeper.found?.value ?? '' },
+  });
   const problems = useFormProblems(form, FIELDS);
   const submit = async ({ text }: NoteAnswerInput) => {
     try {
       await answer.mutateAsync({ noteId, text });
+      keeper.dropDraft();
       onDone();
     } catch (cause) {
       problems.show(cause);
@@ -44,7 +51,11 @@ export function AnswerForm({ thing, noteId, onDone }: AnswerFormProps) {
         </Care>
       )}
       <TextAreaField
-        {...form.register('text')}
+        {...form.register('text', {
+          onChange: (event: ChangeEvent<HTMLTextAreaElement>) => {
+            keeper.keepDraft(event.target.value, null);
+          },
+        })}
         label={t('yourAnswer')}
         rows={2}
         problem={problems.at('text')}
@@ -53,7 +64,13 @@ export function AnswerForm({ thing, noteId, onDone }: AnswerFormProps) {
         <Button type="submit" busy={answer.isPending}>
           {t('sendAnswer')}
         </Button>
-        <Button look="quiet" onClick={onDone}>
+        <Button
+          look="quiet"
+          onClick={() => {
+            keeper.dropDraft();
+            onDone();
+          }}
+        >
           {t('leave')}
         </Button>
       </div>

@@ -1,20 +1,23 @@
 import { Check, Pin, Undo2 } from 'lucide-react';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Note } from '#shared/contracts/notes.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { useKeptDraft } from '#src/lib/kept-draft.js';
 import { LevelChip } from '#src/lib/level-chip.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Well } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useCloseNote, type NotedThing } from '../api/notes-api.js';
+import { answerDraft, isText } from '../model/note-draft.js';
 import { AnswerForm } from './answer-form.js';
 
 /** One note: where it is pinned, who wrote it when, what was answered, and what this person can do. */
-export function NoteCard({ thing, note }: { thing: NotedThing; note: Note }) {
+export function NoteCard({ thing, note, voices }: { thing: NotedThing; note: Note; voices: ReactNode }) {
   const { t } = useTranslation('notes');
-  const [isAnswering, setIsAnswering] = useState(false);
+  const keeper = useKeptDraft(answerDraft(thing, note.id), isText);
+  const [isAnswering, setIsAnswering] = useState(keeper.found !== null);
   const isClosed = note.closedAt !== null;
   return (
     <Well className="grid gap-2">
@@ -25,7 +28,13 @@ export function NoteCard({ thing, note }: { thing: NotedThing; note: Note }) {
         </span>
         {note.level === 'elders' && <LevelChip level="elders" />}
       </p>
-      <Said name={note.authorName} at={note.writtenAt} text={note.text} />
+      {!note.wordsStand && <p className="text-small font-semibold">{t('wordsChanged')}</p>}
+      <Said
+        name={note.authorName}
+        at={note.writtenAt}
+        text={note.text || t(note.voices > 0 ? 'spoken' : 'toBeSpoken')}
+      />
+      {voices}
       {note.answers.length > 0 && (
         <ul aria-label={t('answers')} className="grid gap-2 border-s-2 border-hairline ps-3">
           {note.answers.map((answer) => (
@@ -39,6 +48,7 @@ export function NoteCard({ thing, note }: { thing: NotedThing; note: Note }) {
         <AnswerForm
           thing={thing}
           noteId={note.id}
+          keeper={keeper}
           onDone={() => {
             setIsAnswering(false);
           }}

@@ -1,13 +1,15 @@
 import { useQuery } from '@tanstack/react-query';
 import { MessageSquarePlus } from 'lucide-react';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { NoteField } from '#shared/contracts/notes.js';
+import type { Note, NoteField } from '#shared/contracts/notes.js';
+import { useKeptDraft } from '#src/lib/kept-draft.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Fold } from '#src/ui/fold.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { notesQuery, type NotedThing } from '../api/notes-api.js';
+import { isNoteDraft } from '../model/note-draft.js';
 import { NoteCard } from './note-card.js';
 import { NoteForm } from './note-form.js';
 
@@ -17,17 +19,23 @@ export interface NotedText {
   text: string;
 }
 
+/** Recordings that belong to a note, with the way to add one; `begins` where the note itself is to be spoken. */
+export type VoicesOfNote = (note: Note, begins: boolean) => ReactNode;
+
 export interface NotesPanelProps {
   thing: NotedThing;
   texts: readonly NotedText[];
+  voices: VoicesOfNote;
 }
 
 /** What people remarked on a thing: open notes with their answers, closed ones folded, and the way to pin another. */
-export function NotesPanel({ thing, texts }: NotesPanelProps) {
+export function NotesPanel({ thing, texts, voices }: NotesPanelProps) {
   const { t } = useTranslation('notes');
   const words = useProblemWords();
   const notes = useQuery(notesQuery(thing));
-  const [isWriting, setIsWriting] = useState(false);
+  const keeper = useKeptDraft(`note.${thing.subjectType}.${thing.subjectId}`, isNoteDraft);
+  const [isWriting, setIsWriting] = useState(keeper.found !== null);
+  const [toSpeakId, setToSpeakId] = useState<string | null>(null);
   const open = (notes.data ?? []).filter(({ closedAt }) => closedAt === null);
   const closed = (notes.data ?? []).filter(({ closedAt }) => closedAt !== null);
   return (
@@ -41,7 +49,7 @@ export function NotesPanel({ thing, texts }: NotesPanelProps) {
         <ul aria-label={t('open')} className="grid gap-3">
           {open.map((note) => (
             <li key={note.id}>
-              <NoteCard thing={thing} note={note} />
+              <NoteCard thing={thing} note={note} voices={voices(note, note.id === toSpeakId)} />
             </li>
           ))}
         </ul>
@@ -50,8 +58,10 @@ export function NotesPanel({ thing, texts }: NotesPanelProps) {
         <NoteForm
           thing={thing}
           texts={texts}
-          onDone={() => {
+          keeper={keeper}
+          onDone={(toSpeak) => {
             setIsWriting(false);
+            setToSpeakId(toSpeak);
           }}
         />
       ) : (
@@ -71,7 +81,7 @@ export function NotesPanel({ thing, texts }: NotesPanelProps) {
           <ul className="grid gap-3">
             {closed.map((note) => (
               <li key={note.id}>
-                <NoteCard thing={thing} note={note} />
+                <NoteCard thing={thing} note={note} voices={voices(note, false)} />
               </li>
             ))}
           </ul>
