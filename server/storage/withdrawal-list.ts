@@ -3,11 +3,17 @@ import { appendFile, mkdir, open, readFile } from 'node:fs/promises';
 import path from 'node:path';
 import { z } from 'zod';
 
+/** What of a thing was taken back. */
+const WITHDRAWN_PARTS = ['all', 'sound'] as const;
+export type WithdrawnPart = (typeof WITHDRAWN_PARTS)[number];
+
 const listed = z.strictObject({
   itemType: z.enum(SHARED_ITEM_TYPES),
   itemId: z.uuid(),
   communityId: z.uuid(),
   leavesTrace: z.boolean(),
+  /** Lines from before there was a choice have none. */
+  part: z.enum(WITHDRAWN_PARTS).default('all'),
   at: z.iso.datetime(),
 });
 export type ListedWithdrawal = z.infer<typeof listed>;

@@ -164,6 +164,8 @@ export const attachment = z.strictObject({
   /** Empty where its giver is not to be named to the reader. */
   addedBy: z.string(),
   addedAt: instant,
+  /** A recording whose sound was removed, while what was written out from it stayed. */
+  hasWordsAlone: z.boolean(),
   /** By number; the spoken consent first. */
   parts: z.array(attachmentPart),
   /** Null for a recording. */
@@ -242,8 +244,9 @@ export const attachmentsEndpoints = {
     id: 'saveAttachmentWords',
     method: 'PUT',
     path: '/api/attachments/:attachmentId/words',
-    summary: 'Write out what was said, or translate it; 409 with both texts when somebody wrote meanwhile',
-    access: member('attachment', 'officer', 'elder', 'steward'),
+    summary:
+      'Write out what was said, translate it, or correct it as its giver; 409 with both texts when somebody wrote meanwhile',
+    access: member('attachment', ...ROLES),
     params: attachmentParams,
     body: wordsInput,
     response: attachment,

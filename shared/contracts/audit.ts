@@ -44,6 +44,7 @@ export const AUDIT_ACTIONS = [
   'item-paused',
   'item-resumed',
   'name-taken-off',
+  'sound-removed',
   'consent-written',
   'consent-changed',
   'consent-withdrawn',

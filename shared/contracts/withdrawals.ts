@@ -51,6 +51,8 @@ export const itemState = z.strictObject({
     pause: z.boolean(),
     resume: z.boolean(),
     takeNameOff: z.boolean(),
+    /** A recording whose words were written out: its sound can go and the words stay. */
+    removeSound: z.boolean(),
   }),
 });
 export type ItemState = z.infer<typeof itemState>;
@@ -114,6 +116,15 @@ export const withdrawalsEndpoints = {
     summary: 'Take the giver’s name off a thing, in the draft and in every version',
     access: member('community', ...ROLES),
     params: itemParams,
+  }),
+  removeSound: defineEndpoint({
+    id: 'removeSound',
+    method: 'POST',
+    path: '/api/communities/:communityId/items/attachment/:itemId/sound-removal',
+    summary: 'Remove the sound of a recording for good and keep the words that were written out from it',
+    access: member('community', ...ROLES),
+    params: z.strictObject({ communityId: id, itemId: id }),
+    body: pauseInput,
   }),
   listPaused: defineEndpoint({
     id: 'listPausedItems',

@@ -264,6 +264,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     // Nobody of these gave it or is asked for it: the thing stays.
     withdrawItem: () => ({ leavesTrace: true, askedById: village.place.id }),
     pauseItem: () => ({ askedById: village.place.id }),
+    removeSound: () => ({ askedById: village.place.id }),
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
     changeConsent: () => ({ content: asked(), ...stale }),
     withdrawConsent: () => stale,

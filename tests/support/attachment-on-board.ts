@@ -24,6 +24,7 @@ export function attachmentOf(changes: Partial<Attachment> = {}): Attachment {
     ],
     picture: null,
     words: [],
+    hasWordsAlone: false,
     may: { writeWords: true, remove: false },
     ...changes,
   };

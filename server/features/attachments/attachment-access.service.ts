@@ -45,16 +45,26 @@ export async function seesWhatItIsAbout(
   return row !== null && maySeeSubject(manager, viewer, row);
 }
 
-function isWhole({ kind, parts }: AttachmentEntity): boolean {
-  return kind === 'picture' || parts.some(({ part }) => part > 0);
+function isWhole(row: AttachmentEntity): boolean {
+  return row.kind === 'picture' || row.parts.some(({ part }) => part > 0) || hasWordsAlone(row);
+}
+
+/** Its sound was removed; what was written out from it stayed. */
+export function hasWordsAlone({ kind, parts }: AttachmentEntity): boolean {
+  return kind === 'recording' && parts.length === 0;
 }
 
 /** The spoken consent is proof for those who keep the village's word, and for whoever gave or brought it. */
 export function mayHearConsent(viewer: Viewer, seen: SeenAttachment): boolean {
-  return mayRemove(viewer, seen) || mayWriteWords(viewer);
+  return mayRemove(viewer, seen) || keepsVillagesWord(viewer);
 }
 
-export function mayWriteWords({ roles }: Viewer): boolean {
+/** Those who keep the village’s word, and givers their own: they correct what was written from their voice. */
+export function mayWriteWords(viewer: Viewer, { shared }: SeenAttachment): boolean {
+  return shared.giverId === viewer.personId || keepsVillagesWord(viewer);
+}
+
+function keepsVillagesWord({ roles }: Viewer): boolean {
   return roles.includes('officer') || roles.includes('elder') || roles.includes('steward');
 }
 

@@ -1,5 +1,6 @@
 import { In, type EntityManager } from 'typeorm';
 import { AttachmentPartEntity } from '../../db/entities/attachment-part.entity.js';
+import { AttachmentWordsEntity } from '../../db/entities/attachment-words.entity.js';
 import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { AttachmentSubjectType } from '#shared/contracts/attachments.js';
 
@@ -21,6 +22,25 @@ export async function eraseAttachmentsOf(
     manager,
     rows.map(({ id }) => id),
   );
+}
+
+export async function hasSound(manager: EntityManager, attachmentId: string): Promise<boolean> {
+  return manager.existsBy(AttachmentPartEntity, { attachmentId });
+}
+
+/** A recording from which something was written out. */
+export async function keepsWords(manager: EntityManager, attachmentId: string): Promise<boolean> {
+  return (
+    (await manager.existsBy(AttachmentEntity, { id: attachmentId, kind: 'recording' })) &&
+    (await manager.existsBy(AttachmentWordsEntity, { attachmentId }))
+  );
+}
+
+/** Takes the sound of a recording away, its spoken consent too; what was written out from it stays. */
+export async function eraseSound(manager: EntityManager, attachmentId: string): Promise<ErasedFiles> {
+  const files = await manager.findBy(AttachmentPartEntity, { attachmentId });
+  await manager.delete(AttachmentPartEntity, { attachmentId });
+  return { attachmentIds: [], files };
 }
 
 export async function eraseAttachments(

@@ -4,9 +4,10 @@ import type { DataSource } from 'typeorm';
 import { AttachmentWordsEntity } from '../../db/entities/attachment-words.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
-import { stale } from '../../http/app-error.js';
+import { conflict, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { viewerOf } from '../../policy/viewer.js';
+import { mayWriteWords } from './attachment-access.service.js';
 import { recordAttachment } from './attachment-audit.js';
 import { toWords } from './attachments.mapper.js';
 import { lockAttachment, readable } from './attachments.repository.js';
@@ -25,7 +26,9 @@ export class AttachmentWordsService {
       // Two first writers meet here, before either has read: else both would find nothing to be newer than.
       await lockAttachment(manager, attachmentId);
       const viewer = await viewerOf(manager, actor, this.clock.now());
-      const { row } = await readable(manager, viewer, attachmentId);
+      const seen = await readable(manager, viewer, attachmentId);
+      const { row } = seen;
+      if (!mayWriteWords(viewer, seen)) throw conflict('not-yours');
       const before = await manager.findOne(AttachmentWordsEntity, {
         where: { attachmentId, kind, language },
         relations: { author: true },

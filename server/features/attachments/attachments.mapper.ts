@@ -2,6 +2,7 @@ import type { Attachment, AttachmentWords } from '#shared/contracts/attachments.
 import type { AttachmentWordsEntity } from '../../db/entities/attachment-words.entity.js';
 import type { Viewer } from '../../policy/viewer.js';
 import {
+  hasWordsAlone,
   mayHearConsent,
   mayRemove,
   mayWriteWords,
@@ -29,13 +30,14 @@ export function toAttachment(seen: SeenAttachment, viewer: Viewer, addedByName: 
     sharingLevel: shared.level,
     addedBy: isNamed || !addedByGiver ? addedByName : '',
     addedAt: row.addedAt.toISOString(),
+    hasWordsAlone: hasWordsAlone(row),
     parts: row.parts
       .filter(({ part }) => part > 0 || mayHearConsent(viewer, seen))
       .sort((a, b) => a.part - b.part)
       .map(({ part, contentType, bytes, seconds }) => ({ part, contentType, bytes, seconds })),
     picture: widthPx === null || heightPx === null ? null : { widthPx, heightPx },
     words: row.words.sort((a, b) => wordsOrder(a).localeCompare(wordsOrder(b))).map(toWords),
-    may: { writeWords: mayWriteWords(viewer), remove: mayRemove(viewer, seen) },
+    may: { writeWords: mayWriteWords(viewer, seen), remove: mayRemove(viewer, seen) },
   };
 }
 

@@ -62,12 +62,13 @@ async function figureTexts(manager: EntityManager, viewer: Viewer, id: string): 
   return [{ names, ...(seesStory ? { story: figure.story } : {}) }];
 }
 
-/** Drafts and reviews are for those who see them, and what is kept there for its people, too. */
+/** Drafts and reviews are for those who see them, for givers, and what is kept there for its people, too. */
 async function seenContents(manager: EntityManager, viewer: Viewer, entryId: string): Promise<EntryInput[]> {
   const calendar = { communityId: viewer.communityId };
   const drafted = await manager.findOneBy(EntryEntity, { id: entryId, deletedAt: IsNull(), calendar });
   const shared = (await sharedById(manager, 'entry', [entryId])).get(entryId);
-  const isOpenToThem = seesDrafts(viewer) || (shared !== undefined && isKept(shared));
+  const isTheirs = shared !== undefined && (isKept(shared) || shared.giverId === viewer.personId);
+  const isOpenToThem = seesDrafts(viewer) || isTheirs;
   const frozen = await manager.find(VersionEntryEntity, {
     where: (isOpenToThem ? (['in-review', 'published'] as const) : (['published'] as const)).map((state) => ({
       entryId,

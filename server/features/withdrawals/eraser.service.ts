@@ -1,4 +1,5 @@
 import type { SharedItemType } from '#shared/contracts/sharing.js';
+import type { WithdrawnPart } from '../../storage/withdrawal-list.js';
 import type { EntityManager } from 'typeorm';
 import type { PublishedTrace } from '../../db/entities/withdrawal.entity.js';
 
@@ -17,6 +18,8 @@ export interface Erasing {
   itemId: string;
   communityId: string;
   leavesTrace: boolean;
+  /** All of it, or the sound of a recording alone: its words stay. */
+  part: WithdrawnPart;
 }
 
 /**

@@ -7,6 +7,7 @@ import type { Clock } from '../../http/context.js';
 import {
   eraseAttachments,
   eraseAttachmentsOf,
+  eraseSound,
   type ErasedFiles,
 } from '../attachments/attachment-eraser.service.js';
 import type { AttachmentFilesService } from '../attachments/attachment-files.service.js';
@@ -20,6 +21,7 @@ import {
   eraseFrozenVariant,
   variantIdsOf,
 } from '../versions/frozen-eraser.service.js';
+import type { WithdrawnPart } from '../../storage/withdrawal-list.js';
 import type { Erased, Eraser } from './eraser.service.js';
 
 /** The erasers of the parts that there are. A new part that keeps what people gave adds its own. */
@@ -28,7 +30,7 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
     withIt: erased.attachmentIds.map((itemId) => ({ itemType: 'attachment' as const, itemId })),
     afterwards: () => files.remove(erased.files),
   });
-  return [
+  const whole: Eraser[] = [
     only('entry', async (manager, { itemId, leavesTrace }) => {
       const answers = await manager.findBy(AnswerEntity, { entryId: itemId });
       const spoken = await eraseAttachmentsOf(
@@ -87,6 +89,17 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       return {};
     },
   ];
+  return [
+    ...whole.map((erase) => ofPart('all', erase)),
+    ofPart(
+      'sound',
+      only('attachment', async (manager, { itemId }) => attached(await eraseSound(manager, itemId))),
+    ),
+  ];
+}
+
+function ofPart(part: WithdrawnPart, erase: Eraser): Eraser {
+  return (manager, erasing) => (erasing.part === part ? erase(manager, erasing) : Promise.resolve({}));
 }
 
 function together(first: ErasedFiles, second: ErasedFiles): ErasedFiles {

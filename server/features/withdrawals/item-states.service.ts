@@ -8,6 +8,7 @@ import type { Clock } from '../../http/context.js';
 import { maySee } from '../../policy/policy.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { isWithinSight } from '../sharing/within-sight.service.js';
+import { hasSound, keepsWords } from '../attachments/attachment-eraser.service.js';
 import { titlesOf } from './item-titles.service.js';
 import { appearanceUnhidden, couldSee, mayResume, mayTakeBack, othersUntil } from './taking-back.service.js';
 
@@ -37,6 +38,11 @@ export class ItemStatesService {
         pause: mine && shared,
         resume: mine && !shared && mayResume(actor, row, this.clock.now()),
         takeNameOff: mine && row.details.naming !== 'not-named',
+        removeSound:
+          mine &&
+          itemType === 'attachment' &&
+          (await hasSound(manager, itemId)) &&
+          (await keepsWords(manager, itemId)),
       },
     };
   }

@@ -28,6 +28,10 @@ export function withdrawalsRoutes(
     await withdrawals.takeNameOff(actor, params.itemType, params.itemId);
     return undefined;
   });
+  mount.forMember(withdrawalsEndpoints.removeSound, async ({ params, body }, actor) => {
+    await withdrawals.removeSound(actor, params.itemId, body.askedById);
+    return undefined;
+  });
   mount.forMember(withdrawalsEndpoints.listPaused, async (_call, actor) =>
     wholeList(await states.listPaused(actor)),
   );

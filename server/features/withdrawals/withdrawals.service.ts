@@ -23,11 +23,12 @@ import { recordAudit } from '../audit/audit.service.js';
 import { takeNameOffDraft } from '../calendars/entry-eraser.service.js';
 import { takeNamesOffTellings } from '../figures/figure-eraser.service.js';
 import { takeNameOffFrozen } from '../versions/frozen-eraser.service.js';
+import { hasSound, keepsWords } from '../attachments/attachment-eraser.service.js';
 import type { Eraser } from './eraser.service.js';
 import { couldSee, lockOwn, mayResume } from './taking-back.service.js';
 import { vanish } from './vanishing.service.js';
 
-type Action = 'item-withdrawn' | 'item-paused' | 'item-resumed' | 'name-taken-off';
+type Action = 'item-withdrawn' | 'sound-removed' | 'item-paused' | 'item-resumed' | 'name-taken-off';
 
 /** Taking back what was given: at once, everywhere, by whatever way and through whoever is asked. */
 export class WithdrawalsService {
@@ -51,7 +52,14 @@ export class WithdrawalsService {
       if (row.state === 'withdrawn') return null;
       await expectOfVillage(manager, actor, askedById);
       await this.record(manager, actor, row, 'item-withdrawn', askedById);
-      const gone = await vanish(manager, this.erasers, { itemType, itemId, communityId, leavesTrace, at });
+      const gone = await vanish(manager, this.erasers, {
+        itemType,
+        itemId,
+        communityId,
+        leavesTrace,
+        part: 'all',
+        at,
+      });
       // What its people keep was on no sheet.
       const published = isKept(row) ? [] : gone.published;
       await manager.insert(WithdrawalEntity, {
@@ -64,7 +72,31 @@ export class WithdrawalsService {
       return gone;
     });
     if (vanished === null) return;
-    await this.list.add({ itemType, itemId, communityId, leavesTrace, at: at.toISOString() });
+    await this.list.add({ itemType, itemId, communityId, leavesTrace, part: 'all', at: at.toISOString() });
+    for (const finish of vanished.afterwards) await finish();
+  }
+
+  /**
+   * The voice goes for good, every part of it and the spoken consent; what was written out from it stays, with its
+   * authors, for whom it was.
+   */
+  async removeSound(actor: Actor, itemId: string, askedById: string | null): Promise<void> {
+    const at = this.clock.now();
+    const itemType = 'attachment';
+    const { communityId } = actor;
+    const vanishing = { itemType, itemId, communityId, leavesTrace: false, part: 'sound' } as const;
+    const vanished = await inTransaction(this.dataSource, async (manager) => {
+      const row = await lockOwn(manager, actor, at, { itemType, itemId });
+      if (row.state === 'withdrawn') throw notFound();
+      if (!(await hasSound(manager, itemId))) return null;
+      if (!(await keepsWords(manager, itemId))) throw conflict('nothing-written-out');
+      await expectOfVillage(manager, actor, askedById);
+      await this.record(manager, actor, row, 'sound-removed', askedById);
+      // Before anything is certain: a broken end then does what was asked at the next start.
+      await this.list.add({ ...vanishing, at: at.toISOString() });
+      return vanish(manager, this.erasers, { ...vanishing, at });
+    });
+    if (vanished === null) return;
     for (const finish of vanished.afterwards) await finish();
   }
 

@@ -104,6 +104,7 @@ export const texts = {
     removeSentence: 'The files are taken away at once and cannot be brought back.',
     removeYes: 'Remove it for good',
     open: 'Show it large: {{title}}',
+    wordsAlone: 'The sound was removed for good. What was written out from it stays.',
     incomplete: 'Only the agreement has come so far.',
   },
   words: {

@@ -49,6 +49,7 @@ export const texts = {
     'item-paused': '{{actor}} hid something that was given, for now.',
     'item-resumed': '{{actor}} ended a pause of something that was given.',
     'name-taken-off': '{{actor}} took a giver’s name off.',
+    'sound-removed': '{{actor}} removed the sound of a recording; its words stay.',
     'consent-written': '{{actor}} wrote down what was agreed about “{{subject}}”: {{state}}.',
     'consent-changed': '{{actor}} wrote down a new answer about “{{subject}}”: {{state}}.',
     'consent-withdrawn': '{{actor}} took back what was agreed about “{{subject}}”.',

@@ -83,6 +83,8 @@ export const texts = {
     'part-differs': 'This part has come already with another content. Begin a new recording.',
     'part-missing': 'The part before this one has not come yet. Send that one first.',
     'too-many-attachments': 'At most 60 recordings and pictures belong to one thing. Remove one first.',
+    'nothing-written-out':
+      'Nothing was written out from this recording yet. Write it out first, or take all of it back.',
     'not-yours': 'Only whoever added this can change or remove it.',
     'consent-there': 'This person has been asked about it already. Write the new answer down there.',
     'nothing-to-withdraw': 'Nothing is agreed here that could be taken back.',

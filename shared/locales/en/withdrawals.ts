@@ -33,6 +33,24 @@ export const texts = {
     onlyGiver: 'The time to bring it back is over for others: only its giver can do it now.',
   },
 
+  correct: {
+    title: 'Correct it',
+    what: 'Say what it should say instead. It is pinned to it as your note; whoever writes it changes the words, and you close the note when they are right.',
+    words: 'What was written out from your voice is yours to put right, where the recording stands.',
+    say: 'What it should say',
+    ask: 'Ask for the correction',
+    done: 'Your note is pinned. It stays open until you close it.',
+  },
+
+  sound: {
+    title: 'Remove the recording, keep the words',
+    what: 'The voice goes for good: every part of it and the spoken agreement. What was written out from it stays, for whom it was, with the names of who wrote it.',
+    ask: 'Remove the recording',
+    sure: 'Remove the recording and keep the words?',
+    yes: 'Yes, remove the recording',
+    done: 'The recording is gone. Its words stay.',
+  },
+
   name: {
     title: 'Take the name off',
     what: 'The thing stays; the name of its giver is taken out of the draft, of every version and of what is printed from now on.',

@@ -10,7 +10,7 @@ import { WordsPart } from './words-part.js';
 /** One recording: listen, read what was said, hear the agreement. */
 export function RecordingCard({ attachment }: { attachment: Attachment }) {
   const { t } = useTranslation('attachments');
-  const { id, title, language, naming, parts } = attachment;
+  const { id, title, language, naming, parts, hasWordsAlone } = attachment;
   const speaker =
     attachment.speaker === '' && naming !== 'named' ? t(`somebody.${naming}`) : attachment.speaker;
   const sources = parts.map(({ part, seconds }) => ({
@@ -29,13 +29,13 @@ export function RecordingCard({ attachment }: { attachment: Attachment }) {
       <p className="text-umber-soft">
         {title !== '' && `${name}. `}
         {spoken.length === 0
-          ? t('card.incomplete')
+          ? t(hasWordsAlone ? 'card.wordsAlone' : 'card.incomplete')
           : t('card.parts', { count: spoken.length, length: clockOf(secondsOf(parts)) })}
       </p>
       {spoken.length > 0 && (
         <VoicePlayer key={spoken.length} name={t('player.name', { speaker })} parts={spoken} />
       )}
-      {spoken.length > 0 && <WordsPart attachment={attachment} />}
+      {(spoken.length > 0 || hasWordsAlone) && <WordsPart attachment={attachment} />}
       {consent.length > 0 && (
         <More label={t('card.consentOf')}>
           <VoicePlayer name={t('consent.clip')} parts={consent} isClip />

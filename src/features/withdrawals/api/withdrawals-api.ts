@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { notesEndpoints, type NoteSubjectType } from '#shared/contracts/notes.js';
 import type { SharedItemType } from '#shared/contracts/sharing.js';
 import { withdrawalsEndpoints, type WithdrawalInput } from '#shared/contracts/withdrawals.js';
 import { callApi } from '#src/lib/api-client.js';
@@ -78,6 +79,32 @@ export function useTakeNameOff(item: Item) {
   return useMutation({
     mutationFn: () => callApi(withdrawalsEndpoints.takeNameOff, { params: { ...item } }),
     onSuccess: lookAgain,
+  });
+}
+
+/** The voice goes for good, what was written out from it stays. */
+export function useRemoveSound({ communityId, itemId }: Item) {
+  const lookAgain = useLookAgain();
+  return useMutation({
+    mutationFn: (askedById: string | null) =>
+      callApi(withdrawalsEndpoints.removeSound, { params: { communityId, itemId }, body: { askedById } }),
+    onSuccess: lookAgain,
+  });
+}
+
+/** Says what it should say instead: a note to whoever writes it, seen by those who see the thing. */
+export function useAskCorrection({ communityId, itemId }: Item, subjectType: NoteSubjectType) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (text: string) =>
+      callApi(notesEndpoints.add, {
+        params: { communityId },
+        body: {
+          ...{ subjectType, subjectId: itemId, pin: { at: 'whole' }, text },
+          ...{ isSpoken: false, level: 'village' },
+        },
+      }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ['notes', communityId] }),
   });
 }
 

@@ -11,8 +11,10 @@ import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { itemStateQuery, type Item } from '../api/withdrawals-api.js';
+import { CorrectBoard } from './correct-board.js';
 import { HideBoard } from './hide-board.js';
 import { NameBoard } from './name-board.js';
+import { SoundBoard } from './sound-board.js';
 import { WithdrawBoard } from './withdraw-board.js';
 
 const params = withdrawalsEndpoints.readState.params;
@@ -61,6 +63,8 @@ function Choices({ item, backTo, onGone }: { item: Item; backTo: string; onGone:
         <div className="grid gap-4">
           <p>{t('lead')}</p>
           <HideBoard item={item} state={state} />
+          <CorrectBoard item={item} state={state} />
+          {state.may.removeSound && <SoundBoard item={item} state={state} />}
           {state.may.takeNameOff && <NameBoard item={item} />}
           {state.may.withdraw && <WithdrawBoard item={item} state={state} onGone={onGone} />}
         </div>

@@ -58,6 +58,7 @@ describe('voices and pictures of a thing', () => {
 
   it('are there to be heard by an observer, who adds nothing and changes nothing', async () => {
     const heard = attachmentOf({
+      hasWordsAlone: false,
       may: { writeWords: false, remove: false },
       parts: attachmentOf().parts.slice(1),
     });

@@ -23,7 +23,7 @@ function stateOf(changes: Partial<ItemState> = {}): ItemState {
     pausedAt: null,
     title: 'Sow the terrace',
     isMine: true,
-    may: { withdraw: true, pause: true, resume: false, takeNameOff: true },
+    may: { withdraw: true, pause: true, resume: false, takeNameOff: true, removeSound: false },
     ...changes,
   };
 }
@@ -103,7 +103,7 @@ describe('taking something back', () => {
   });
 
   it('says to whom to turn where it is not theirs', async () => {
-    const may = { withdraw: false, pause: false, resume: false, takeNameOff: false };
+    const may = { withdraw: false, pause: false, resume: false, takeNameOff: false, removeSound: false };
     await open({ [`GET ${item}/state`]: stateOf({ isMine: false, may }) });
     await screen.findByText('This is not yours to take back');
     expect(screen.queryByRole('button', { name: 'Take it back' })).toBeNull();
@@ -115,7 +115,7 @@ describe('something hidden', () => {
     const { user, writes } = await open({
       [`GET ${item}/state`]: stateOf({
         ...{ state: 'paused', pausedAt: '2027-03-10T06:00:00.000Z' },
-        may: { withdraw: true, pause: false, resume: true, takeNameOff: true },
+        may: { withdraw: true, pause: false, resume: true, takeNameOff: true, removeSound: false },
       }),
       [`DELETE ${item}/pause`]: new Response(null, { status: 204 }),
     });
