@@ -30,11 +30,7 @@ export async function entriesForUse<B extends VersionEntryBody>(
   return entries.filter((entry) => {
     const figureId = figureOf(entry);
     if (figureId !== null && !mayUse(figureConsentsOf(figureId), use, null, today)) return false;
-    const consents = consentsOf(entry.entryId);
-    const { kind, agreedToPrint } = entry.content;
-    // Before there was a register, the yes of a belief's giver to print was written into the entry itself.
-    if (consents.length === 0 && kind === 'belief' && use === 'print') return agreedToPrint;
-    return mayUse(consents, use, kind, today);
+    return mayUse(consentsOf(entry.entryId), use, entry.content.kind, today);
   });
 }
 

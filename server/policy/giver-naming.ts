@@ -13,11 +13,25 @@ export function hidesGiver(viewer: Viewer, shared: Shared | undefined): boolean 
   return shared.giverId !== viewer.personId;
 }
 
+/** How somebody reads of a giver: by the name, by a code for their role, or not at all. */
+export function givenName(viewer: Viewer, shared: Shared | undefined, name: string): string {
+  if (shared === undefined || name === '' || !hidesGiver(viewer, shared)) return name;
+  return shared.details.naming === 'role' ? GIVER_BY_ROLE : '';
+}
+
+/** Nobody in particular: whoever looks at a wall. */
+export function anybody(viewer: Viewer): Viewer {
+  return { ...viewer, personId: '' };
+}
+
 /** A content with its giver named as they wish: by name, as somebody of their role, or not at all. */
 export function withNaming<C extends Given>(viewer: Viewer, shared: Shared | undefined, content: C): C {
   if (shared === undefined || !hidesGiver(viewer, shared)) return content;
-  const giver = shared.details.naming === 'role' ? GIVER_BY_ROLE : '';
-  return { ...content, giver, ...(content.giverId === undefined ? {} : { giverId: null }) };
+  return {
+    ...content,
+    giver: givenName(viewer, shared, content.giver),
+    ...(content.giverId === undefined ? {} : { giverId: null }),
+  };
 }
 
 /** What somebody writes over a content whose giver was kept from them: the giver stays as they are. */

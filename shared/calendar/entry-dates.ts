@@ -82,7 +82,6 @@ export function entryDatesFromDays(
     if (result.lastDateEffect === 'closed') warnings.add('window-closed-by-last-date');
     if (result.lastDateEffect === 'shortened') warnings.add('window-shortened-by-last-date');
   }
-  if (timing.kind === 'belief' && !timing.agreedToPrint) warnings.add('belief-not-agreed-to-print');
   return {
     starOutcome: lead.starOutcome,
     phenomenonOutcome: lead.phenomenonOutcome,

@@ -41,7 +41,6 @@ export interface EntryTiming {
   hasLastDate: boolean;
   lastDate: { date: MonthDay; source: string } | null;
   protectiveWatch: boolean;
-  agreedToPrint: boolean;
 }
 
 export const ENTRY_WARNINGS = [

@@ -61,8 +61,8 @@ const consentFields = z.strictObject({
   givenAs: z.enum(CONSENT_GIVERS),
   /** The giver, where they are one of the village's people here. */
   giverId: id.nullable(),
-  /** As they wish to be called. */
-  giverName: line(120, 1),
+  /** As they wish to be called. Empty, or a code for their role, where they are not named to whoever reads it. */
+  giverName: line(120),
   /** Who spoke for a group, and by what right. */
   spokeFor: line(200),
   askedOn: isoDate,
@@ -112,7 +112,10 @@ export type ConsentContent = z.infer<typeof consentContent>;
 
 export const consentInput = consentFields
   .extend({ itemType: z.enum(CONSENT_ITEMS), itemId: id })
-  .superRefine(consentHolds);
+  .superRefine(consentHolds)
+  .superRefine(({ giverName }, context) => {
+    if (giverName === '') context.addIssue({ code: 'custom', path: ['giverName'], message: 'required' });
+  });
 export type ConsentInput = z.infer<typeof consentInput>;
 
 export const consentUpdate = z.strictObject({ content: consentContent, version: rowVersion });

@@ -25,8 +25,8 @@ const variantFields = z.strictObject({
   offsets: entryOffsets,
   otherSigns: text(500),
   ifLate: text(500),
-  /** Who goes by it, as they wish to be called, and who of the village's people here that is. */
-  giver: line(120, 1),
+  /** Who goes by it, as they wish to be called (empty where their name was taken off), and who of the village's people here that is. */
+  giver: line(120),
   giverId: id.nullable(),
   confidence: z.enum(CONFIDENCES),
   basis: z.enum(BASES),

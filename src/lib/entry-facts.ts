@@ -77,11 +77,6 @@ export function useEntryFacts(): EntryFacts {
             label: t('form.sharingLevel'),
             value: sharing(content.sharingLevel, content.sharing),
           },
-          {
-            key: 'print',
-            label: t('form.printing'),
-            value: content.agreedToPrint ? t('form.agreed') : t('form.notAgreed'),
-          },
         ]),
       }),
     };

@@ -4,6 +4,7 @@ import type { FrozenVariant } from '#shared/contracts/variants.js';
 import { Chip } from '#src/ui/chip.js';
 import { Well } from '#src/ui/surfaces.js';
 import { useEntryWords, type NamesByKey } from './entry-words.js';
+import { useGiverWords } from './giver-words.js';
 import { useSharingWords } from './sharing-words.js';
 
 export interface VariantListProps<V extends FrozenVariant> {
@@ -23,6 +24,7 @@ export function VariantList<V extends FrozenVariant>({
 }: VariantListProps<V>) {
   const { t } = useTranslation('variants');
   const words = useEntryWords();
+  const giverWords = useGiverWords();
   const sharing = useSharingWords();
   return (
     <ul className="grid gap-3">
@@ -32,7 +34,11 @@ export function VariantList<V extends FrozenVariant>({
         return (
           <li key={variantId}>
             <Well className="grid gap-1">
-              <p className="font-semibold">{t('counts', { giver: content.giver })}</p>
+              <p className="font-semibold">
+                {content.giver === ''
+                  ? t('countsUnnamed')
+                  : t('counts', { giver: giverWords(content.giver) })}
+              </p>
               {!isObjection && (
                 <>
                   <p>{words.leadAlone(content, markers)}</p>

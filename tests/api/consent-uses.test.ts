@@ -12,7 +12,8 @@ import {
   type AskedVillage,
 } from '#tests/support/asked-village.js';
 import { addEntry, beginCalendar, entriesOf } from '#tests/support/calendar-api.js';
-import { addConsent, asked, consentContent } from '#tests/support/consent-api.js';
+import { BeliefConsents1798400000000 } from '#server/db/migrations/1798400000000-belief-consents.js';
+import { addConsent, asked, consentContent, consentsPath } from '#tests/support/consent-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 
 let api: TestApi;
@@ -42,13 +43,35 @@ describe('printing', () => {
     expect(await sheet()).toContain('Sow long millet');
   });
 
-  it('of a belief goes by the consent where there is one, else by the yes that was written into the entry', async () => {
-    expect(await sheet()).toContain('Feast of lamps');
-    expect(await sheet()).not.toContain('Quiet days');
+  it('of a belief goes by its consent alone, whatever an older tick in the entry says', async () => {
+    expect(await sheet()).not.toContain('Feast of lamps');
     await addConsent(village.officer, 'entry', village.feast);
     await addConsent(village.officer, 'entry', village.quietDays, { uses: ['keep', 'show', 'print'] });
     expect(await sheet()).not.toContain('Feast of lamps');
     expect(await sheet()).toContain('Quiet days');
+  });
+
+  it('of a belief that was agreed to before there was a register goes on, by a record that is due to be asked', async () => {
+    const migrate = async () => {
+      const runner = api.dataSource.createQueryRunner();
+      await new BeliefConsents1798400000000().up(runner);
+      await runner.release();
+    };
+    await migrate();
+    await migrate();
+    const lines = await registerOf(village.officer);
+    expect(lines).toMatchObject([
+      {
+        itemId: village.feast,
+        state: 'given',
+        isDue: true,
+        uses: expect.arrayContaining(['print']) as unknown,
+      },
+    ]);
+    const [record] = lines;
+    const read = await village.officer.get(consentsPath(village.officer, record?.id)).expect(200);
+    expect(read.body).toMatchObject({ content: { proof: null, explanation: 'before there was a register' } });
+    expect(await sheet()).toContain('Feast of lamps');
   });
 
   it('stops while somebody is asked and has not answered: silence is no yes', async () => {

@@ -13,6 +13,7 @@ import {
   takeBack,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addConsent } from '#tests/support/consent-api.js';
 import { readPdfPages, ringsIn, scaleBarsIn } from '#tests/support/pdf/pdf-content.js';
 import { readPdfText } from '#tests/support/pdf/read-text.js';
 import { allWords } from '#tests/support/sheet/page-checks.js';
@@ -36,11 +37,8 @@ beforeAll(async () => {
     agreedToPrint: false,
     lead: { type: 'marker', markerKey: 'hr2326', phenomenon: 'heliacal-rising', occurrence: 1 },
   });
-  await addEntry(officer, calendarId, {
-    titleOfficer: 'Feast of lamps',
-    kind: 'belief',
-    agreedToPrint: true,
-  });
+  const feast = await addEntry(officer, calendarId, { titleOfficer: 'Feast of lamps', kind: 'belief' });
+  await addConsent(officer, 'entry', feast.id, { uses: ['keep', 'show', 'print'] });
   await addEntry(officer, calendarId, {
     titleOfficer: 'Grazing opens',
     lead: { type: 'fixed-date', date: { month: 10, day: 4 }, source: 'Water committee' },

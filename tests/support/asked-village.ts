@@ -6,7 +6,7 @@ import { addEntry, beginCalendar, openVillage, publishDraft, type Village } from
 import { consentsPath } from './consent-api.js';
 import { readPdfText } from './pdf/read-text.js';
 
-/** A published calendar: farm work, two beliefs (one agreed to in the old way), and what an elder keeps. */
+/** A published calendar: farm work, two beliefs (one ticked as agreed in the old way), and what an elder keeps. */
 export interface AskedVillage extends Village {
   staff: Client;
   observer: Client;

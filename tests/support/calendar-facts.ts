@@ -20,7 +20,6 @@ export function timing(changes: Partial<EntryTiming> = {}): EntryTiming {
     hasLastDate: false,
     lastDate: null,
     protectiveWatch: false,
-    agreedToPrint: true,
     ...changes,
   };
 }

@@ -12,6 +12,7 @@ import { Cards1797900000000 } from './1797900000000-cards.js';
 import { Variants1798000000000 } from './1798000000000-variants.js';
 import { AnswersOfItsPeople1798200000000 } from './1798200000000-answers-of-its-people.js';
 import { ByEar1798300000000 } from './1798300000000-by-ear.js';
+import { BeliefConsents1798400000000 } from './1798400000000-belief-consents.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -29,4 +30,5 @@ export const MIGRATIONS = [
   Variants1798000000000,
   AnswersOfItsPeople1798200000000,
   ByEar1798300000000,
+  BeliefConsents1798400000000,
 ];

@@ -36,6 +36,11 @@ export async function keepsWords(manager: EntityManager, attachmentId: string): 
   );
 }
 
+/** Who speaks is said no more; what was said stays. */
+export async function takeNameOffSpeaker(manager: EntityManager, attachmentId: string): Promise<void> {
+  await manager.update(AttachmentEntity, { id: attachmentId }, { speaker: '' });
+}
+
 /** Takes the sound of a recording away, its spoken consent too; what was written out from it stays. */
 export async function eraseSound(manager: EntityManager, attachmentId: string): Promise<ErasedFiles> {
   const files = await manager.findBy(AttachmentPartEntity, { attachmentId });

@@ -1,5 +1,6 @@
 import type { Attachment, AttachmentWords } from '#shared/contracts/attachments.js';
 import type { AttachmentWordsEntity } from '../../db/entities/attachment-words.entity.js';
+import { hidesGiver } from '../../policy/giver-naming.js';
 import type { Viewer } from '../../policy/viewer.js';
 import {
   hasWordsAlone,
@@ -13,8 +14,9 @@ export function toAttachment(seen: SeenAttachment, viewer: Viewer, addedByName: 
   const { row, shared } = seen;
   const { widthPx, heightPx } = row;
   const { naming } = shared.details;
-  const isNamed = naming === 'named' || shared.giverId === viewer.personId;
-  const addedByGiver = row.addedBy === shared.giverId;
+  // Whoever gave it may have brought it, and written it out, too.
+  const isHidden = hidesGiver(viewer, shared);
+  const nameOf = (id: string, name: string) => (isHidden && id === shared.giverId ? '' : name);
   return {
     id: row.id,
     communityId: row.communityId,
@@ -23,12 +25,12 @@ export function toAttachment(seen: SeenAttachment, viewer: Viewer, addedByName: 
     subjectType: row.subjectType,
     subjectId: row.subjectId,
     title: row.title,
-    speaker: isNamed ? row.speaker : '',
+    speaker: isHidden ? '' : row.speaker,
     naming,
     language: row.language,
     consent: row.consent,
     sharingLevel: shared.level,
-    addedBy: isNamed || !addedByGiver ? addedByName : '',
+    addedBy: nameOf(row.addedBy, addedByName),
     addedAt: row.addedAt.toISOString(),
     hasWordsAlone: hasWordsAlone(row),
     parts: row.parts
@@ -36,7 +38,9 @@ export function toAttachment(seen: SeenAttachment, viewer: Viewer, addedByName: 
       .sort((a, b) => a.part - b.part)
       .map(({ part, contentType, bytes, seconds }) => ({ part, contentType, bytes, seconds })),
     picture: widthPx === null || heightPx === null ? null : { widthPx, heightPx },
-    words: row.words.sort((a, b) => wordsOrder(a).localeCompare(wordsOrder(b))).map(toWords),
+    words: row.words
+      .sort((a, b) => wordsOrder(a).localeCompare(wordsOrder(b)))
+      .map((words) => ({ ...toWords(words), authorName: nameOf(words.authorId, words.author.displayName) })),
     may: { writeWords: mayWriteWords(viewer, seen), remove: mayRemove(viewer, seen) },
   };
 }

@@ -1,4 +1,5 @@
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import type { EntityManager } from 'typeorm';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
@@ -21,7 +22,9 @@ export async function takeNameOffDraft(manager: EntityManager, entryId: string):
   const row = await manager.findOneBy(EntryEntity, { id: entryId });
   if (row === null) return;
   const { giverId: _giver, ...content } = row.content;
-  await manager.update(EntryEntity, { id: entryId }, { content: { ...content, giver: '' } });
+  // The entry's own words about how it is shared follow, so that the next edit does not ask for a wider circle.
+  const sharing = { ...(content.sharing ?? PLAIN_DETAILS), naming: 'not-named' as const };
+  await manager.update(EntryEntity, { id: entryId }, { content: { ...content, giver: '', sharing } });
 }
 
 /**

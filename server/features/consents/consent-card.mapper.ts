@@ -1,4 +1,5 @@
 import { CONSENT_USES, type Consent } from '#shared/contracts/consents.js';
+import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import type { ConsentCardModel } from '#shared/sheet/consent-card.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
@@ -13,7 +14,7 @@ export function toConsentCard(consent: Consent, communityName: string, language:
   return {
     title: t('card.title'),
     under: [
-      t('card.copy', { name: content.giverName }),
+      t('card.copy', { name: nameOf(content.giverName, t) }),
       consent.title === null
         ? t('card.aboutKept', { item })
         : t('card.about', { thing: t('sheet.about', { item, title: consent.title }) }),
@@ -44,6 +45,10 @@ export function toConsentCard(consent: Consent, communityName: string, language:
     lines: [t('card.mark'), t('card.witness')],
     foot: t('card.foot', { community: communityName }),
   };
+}
+
+function nameOf(giverName: string, t: Translate): string {
+  return giverName === '' || giverName === GIVER_BY_ROLE ? t('card.unnamed') : giverName;
 }
 
 function askedOf({ content, state }: Consent, t: Translate, day: (iso: string) => string): string[] {

@@ -19,3 +19,20 @@ export async function eraseConsents(
   await manager.delete(ConsentEntity, { id: In(ids) });
   return ids;
 }
+
+/** What was agreed stands; who agreed is said no more, where it is that giver. */
+export async function takeNamesOffConsents(
+  manager: EntityManager,
+  itemType: SharedItemType,
+  itemId: string,
+  giver: { id: string | null; names: ReadonlySet<string> },
+): Promise<void> {
+  const type = CONSENT_ITEMS.find((one) => one === itemType);
+  if (type === undefined) return;
+  for (const { id, giverId, details } of await manager.findBy(ConsentEntity, { itemType: type, itemId })) {
+    const isTheirs = (giver.id !== null && giverId === giver.id) || giver.names.has(details.giverName);
+    if (!isTheirs) continue;
+    const nameless = { ...details, giverName: '', naming: 'not-named' as const };
+    await manager.update(ConsentEntity, { id }, { details: nameless });
+  }
+}

@@ -7,20 +7,22 @@ export interface ConsentFacts {
   row: ConsentEntity;
   thing: ConsentThing;
   isMine: boolean;
+  /** The giver's name, a code for their role, or nothing: as far as it is for this person. */
+  nameShown: string;
   may: ConsentLine['may'];
   /** Civil day of the village. */
   today: string;
 }
 
 /** A line without a word of what is not theirs to read. */
-export function toConsentLine({ row, thing, isMine, may, today }: ConsentFacts): ConsentLine {
+export function toConsentLine({ row, thing, isMine, may, today, nameShown }: ConsentFacts): ConsentLine {
   return {
     id: row.id,
     itemType: row.itemType,
     itemId: row.itemId,
     level: thing.shared.level,
     title: thing.title,
-    giverName: may.read ? row.details.giverName : null,
+    giverName: may.read ? nameShown : null,
     uses: may.read ? row.uses : null,
     isMine,
     state: stateOn(row, today),
@@ -34,11 +36,14 @@ export function toConsentLine({ row, thing, isMine, may, today }: ConsentFacts):
 
 /** For those who may read it. */
 export function toConsent(facts: ConsentFacts, recordedByName: string): Consent {
-  const { row } = facts;
+  const { row, nameShown, thing } = facts;
+  const isNamed = nameShown === row.details.giverName;
+  // Their own hand may have written it down.
+  const wroteIt = row.recordedBy === row.giverId || row.recordedBy === thing.shared.giverId;
   return {
     ...toConsentLine(facts),
-    content: contentOf(row),
-    recordedByName,
+    content: { ...contentOf(row), giverName: nameShown, ...(isNamed ? {} : { giverId: null }) },
+    recordedByName: isNamed || !wroteIt ? recordedByName : '',
     recordedAt: row.recordedAt.toISOString(),
   };
 }

@@ -19,6 +19,7 @@ import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
 import { narrowNaming } from './agreed-naming.js';
 import { recordConsent, type ConsentAction } from './consent-audit.js';
+import { asksByName, consentName, withKeptName } from './consent-names.js';
 import { expectAnswerFollows, expectKnown, expectMayAsk, mayAsk, mayOf, withProof } from './consent-rules.js';
 import { consentThings, type ConsentThing, type ThingRef } from './consent-things.service.js';
 import { toColumns, toConsent, toConsentLine, type ConsentFacts } from './consents.mapper.js';
@@ -67,6 +68,7 @@ export class ConsentsService {
     if (!thing.isShown && !(asks && thing.isSeen) && readable.length === 0) throw notFound();
     const { giverId, giverName } = thing;
     const { level } = thing.shared;
+    const isNamed = asksByName(await this.viewer(manager, actor), thing);
     const names = await personNames(manager, [giverId, ...readable.map(({ row }) => row.recordedBy)]);
     const nameOf = (id: string | null) => (id === null ? '' : (names.get(id) ?? ''));
     return {
@@ -74,8 +76,8 @@ export class ConsentsService {
       itemId,
       level,
       title: thing.title,
-      giverId: asks ? giverId : null,
-      giverName: asks ? giverName || nameOf(giverId) : '',
+      giverId: asks && isNamed ? giverId : null,
+      giverName: asks && isNamed ? giverName || nameOf(giverId) : '',
       items: readable.map((facts) => toConsent(facts, nameOf(facts.row.recordedBy))),
       mayAsk: asks,
     };
@@ -118,7 +120,7 @@ export class ConsentsService {
       if (row.version !== update.version) throw stale(await this.one(manager, actor, row), update.content);
       const content = withProof(
         actor,
-        update.content,
+        withKeptName(await this.viewer(manager, actor), row, thing, update.content),
         row.giverId === actor.person.id ? row : thing,
         'content.',
       );
@@ -229,7 +231,8 @@ export class ConsentsService {
       const thing = thingOf(row);
       if (thing === undefined) return [];
       const isMine = row.giverId === actor.person.id;
-      return [{ row, thing, isMine, may: mayOf(actor, row, thing), today: viewer.today }];
+      const nameShown = consentName(viewer, row, thing);
+      return [{ row, thing, isMine, nameShown, may: mayOf(actor, row, thing), today: viewer.today }];
     });
   }
 

@@ -1,7 +1,10 @@
-import type { Figure, FigureInput, FigureUse } from '#shared/contracts/figures.js';
+import type { Figure, FigureInput, FigureUse, FigureVariant } from '#shared/contracts/figures.js';
+import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import type { EntryEntity } from '../../db/entities/entry.entity.js';
+import { givenName, hidesGiver } from '../../policy/giver-naming.js';
 import type { Shared } from '../../policy/policy.js';
+import type { Viewer } from '../../policy/viewer.js';
 import type { FigureEntity } from '../../db/entities/figure.entity.js';
 
 const OWN_DEPTHS_SOURCE = 'depths that the village set for this figure';
@@ -17,12 +20,15 @@ export interface FigureFacts {
   /** Null where story and variants are not for this person. */
   story: Shared | null;
   updatedByName: string;
+  viewer: Viewer;
 }
 
-export function toFigure({ row, shared, story, updatedByName }: FigureFacts): Figure {
+export function toFigure({ row, shared, story, updatedByName, viewer }: FigureFacts): Figure {
   return {
     ...fromFigureInput(row),
-    ...(story === null ? { story: '', variants: [] } : { storyLevel: story.level }),
+    ...(story === null
+      ? { story: '', variants: [] }
+      : { storyLevel: story.level, variants: tellings(viewer, story, row.variants) }),
     storyShown: story !== null,
     sharingLevel: shared.level,
     sharing: shared.details,
@@ -36,6 +42,26 @@ export function toFigure({ row, shared, story, updatedByName }: FigureFacts): Fi
 }
 
 type FigureColumns = Omit<FigureInput, 'sharingLevel' | 'sharing' | 'storyLevel'>;
+
+/** Who told each is said as the story's giver wishes. */
+function tellings(viewer: Viewer, story: Shared, variants: FigureVariant[]): FigureVariant[] {
+  return variants.map(({ toldBy, text }) => ({ toldBy: givenName(viewer, story, toldBy), text }));
+}
+
+/** What somebody writes over tellings whose tellers were kept from them: the names stay with what was told. */
+export function withKeptTellers(
+  viewer: Viewer,
+  story: Shared | undefined,
+  stored: readonly FigureVariant[],
+  written: FigureVariant[],
+): FigureVariant[] {
+  if (!hidesGiver(viewer, story)) return written;
+  return written.map(({ toldBy, text }, index) => {
+    const wasHidden = toldBy === '' || toldBy === GIVER_BY_ROLE;
+    const before = stored.find((one) => one.text === text) ?? stored[index];
+    return { toldBy: wasHidden ? (before?.toldBy ?? '') : toldBy, text };
+  });
+}
 
 /** The columns have the names of the fields; written out, so that nothing else ever passes. */
 export function fromFigureInput(input: FigureColumns): FigureColumns {

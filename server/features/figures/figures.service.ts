@@ -20,7 +20,7 @@ import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { shareChangedFigure, shareNewFigure } from './figure-sharing.service.js';
-import { fromFigureInput, markerKeyOfFigure, toFigureUse } from './figures.mapper.js';
+import { fromFigureInput, markerKeyOfFigure, toFigureUse, withKeptTellers } from './figures.mapper.js';
 import { seenFigures, seenUses } from './seen-figures.service.js';
 import { entriesThatGoBy, figureRows } from './figures.repository.js';
 
@@ -78,9 +78,13 @@ export class FiguresService {
       const row = await this.find(manager, actor, figureId, { mode: 'pessimistic_write' });
       if (row.version !== version) throw stale(await this.describe(manager, actor, figureId), input);
       const { storyShown } = await this.describe(manager, actor, figureId);
+      const viewer = await this.viewer(manager, actor);
+      const story = (await sharedById(manager, 'story', [figureId])).get(figureId);
       // A story that somebody does not see is not theirs to overwrite with the nothing that they were shown.
       const changes = fromFigureInput(
-        storyShown ? input : { ...input, story: row.story, variants: row.variants },
+        storyShown
+          ? { ...input, variants: withKeptTellers(viewer, story, row.variants, input.variants) }
+          : { ...input, story: row.story, variants: row.variants },
       );
       const shared = await shareChangedFigure(manager, figureId, input, storyShown);
       const fields = [...changedFields(fromFigureInput(row), changes), ...(shared ? ['sharingLevel'] : [])];

@@ -27,7 +27,9 @@ export async function seenFigures(
     if (shared === undefined || !maySee(viewer, shared)) return [];
     const story = stories.get(row.id);
     const seenStory = story !== undefined && maySee(viewer, story) ? story : null;
-    return [toFigure({ row, shared, story: seenStory, updatedByName: names.get(row.updatedBy) ?? '' })];
+    return [
+      toFigure({ row, shared, story: seenStory, updatedByName: names.get(row.updatedBy) ?? '', viewer }),
+    ];
   });
 }
 

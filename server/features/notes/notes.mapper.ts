@@ -1,20 +1,27 @@
 import type { Note } from '#shared/contracts/notes.js';
-import type { SharingLevel } from '#shared/contracts/sharing.js';
 import type { NoteAnswerEntity } from '../../db/entities/note-answer.entity.js';
 import type { NoteEntity } from '../../db/entities/note.entity.js';
+import { givenName } from '../../policy/giver-naming.js';
+import type { Shared } from '../../policy/policy.js';
+import type { Viewer } from '../../policy/viewer.js';
 
 export interface NoteFacts {
   row: NoteEntity;
   /** Oldest first. */
   answers: readonly NoteAnswerEntity[];
-  level: SharingLevel;
+  shared: Shared;
+  viewer: Viewer;
   wordsStand: boolean;
   voices: number;
   names: ReadonlyMap<string, string>;
-  askingId: string;
 }
 
-export function toNote({ row, answers, level, wordsStand, voices, names, askingId }: NoteFacts): Note {
+export function toNote({ row, answers, shared, viewer, wordsStand, voices, names }: NoteFacts): Note {
+  // Their writer is named as they wish, in the answers too.
+  const nameOf = (id: string) => {
+    const name = names.get(id) ?? '';
+    return id === row.authorId ? givenName(viewer, shared, name) : name;
+  };
   return {
     id: row.id,
     subjectType: row.subjectType,
@@ -23,17 +30,17 @@ export function toNote({ row, answers, level, wordsStand, voices, names, askingI
     wordsStand,
     text: row.text,
     voices,
-    level,
-    authorName: names.get(row.authorId) ?? '',
+    level: shared.level,
+    authorName: nameOf(row.authorId),
     writtenAt: row.writtenAt.toISOString(),
     closedAt: row.closedAt?.toISOString() ?? null,
     answers: answers.map((answer) => ({
       id: answer.id,
-      authorName: names.get(answer.authorId) ?? '',
+      authorName: nameOf(answer.authorId),
       text: answer.text,
       writtenAt: answer.writtenAt.toISOString(),
-      mine: answer.authorId === askingId,
+      mine: answer.authorId === viewer.personId,
     })),
-    mine: row.authorId === askingId,
+    mine: row.authorId === viewer.personId,
   };
 }

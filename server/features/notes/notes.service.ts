@@ -7,7 +7,7 @@ import {
   type NoteInput,
   type NoteSubject,
 } from '#shared/contracts/notes.js';
-import { PLAIN_DETAILS, type SharingLevel } from '#shared/contracts/sharing.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { randomUUID } from 'node:crypto';
 import { In, type DataSource, type EntityManager } from 'typeorm';
 import { NoteAnswerEntity } from '../../db/entities/note-answer.entity.js';
@@ -17,7 +17,7 @@ import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { figureIdOf } from '../../policy/entry-sight.js';
-import { maySee } from '../../policy/policy.js';
+import { maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { voicesOfNotes, type NoteVoices } from '../attachments/note-voices.service.js';
@@ -28,7 +28,7 @@ import { toNote } from './notes.mapper.js';
 
 interface SeenNote {
   row: NoteEntity;
-  level: SharingLevel;
+  shared: Shared;
   voices: NoteVoices;
 }
 
@@ -166,7 +166,7 @@ export class NotesService {
       const voices = voicesOf(row.id);
       if (own === undefined || !maySee(viewer, own)) return [];
       if (row.text === '' && !voices.isSaid && row.authorId !== viewer.personId) return [];
-      return [{ row, level: own.level, voices }];
+      return [{ row, shared: own, voices }];
     });
   }
 
@@ -182,20 +182,21 @@ export class NotesService {
       where: { noteId: In(seen.map(({ row }) => row.id)) },
       order: { writtenAt: 'ASC', id: 'ASC' },
     });
+    const viewer = await this.viewer(manager, actor);
     const newest = await this.newestTexts(manager, actor, rows);
     const names = await personNames(manager, [
       ...seen.map(({ row }) => row.authorId),
       ...answers.map(({ authorId }) => authorId),
     ]);
-    return seen.map(({ row, level, voices }) =>
+    return seen.map(({ row, shared, voices }) =>
       toNote({
         row,
-        level,
+        shared,
+        viewer,
         wordsStand: row.pin.at !== 'words' || hasQuote(newest, row.pin.field, row.pin.quote),
         voices: voices.heard,
         names,
         answers: answers.filter(({ noteId }) => noteId === row.id),
-        askingId: actor.person.id,
       }),
     );
   }

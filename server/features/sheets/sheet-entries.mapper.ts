@@ -1,5 +1,6 @@
 import { boardOf } from '#shared/calendar/variants.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import type { SheetEntry } from '#shared/sheet/sheet-model.js';
 import type { SheetWords } from '#shared/sheet/sheet-words.js';
@@ -58,7 +59,13 @@ function linesOf(body: VersionEntryBody, files: Translate): Line[] {
   const joined = drivenBy !== 'entry' && drivenBy !== 'variant';
   const told = (code: 'ownDays' | 'otherDays' | 'safeDays', giver: string) => ({
     village: title.village,
-    officer: files(`sheet.${code}`, { title: title.officer, giver }),
+    officer:
+      giver === '' && code !== 'safeDays'
+        ? files('sheet.unnamedDays', { title: title.officer })
+        : files(`sheet.${code}`, {
+            title: title.officer,
+            giver: giver === GIVER_BY_ROLE ? files('sheet.byRole') : giver,
+          }),
   });
   const marks = beside.flatMap(({ variantId, window: own }): Line[] => {
     const variant = variants.find((one) => one.variantId === variantId);

@@ -1,11 +1,17 @@
-import type { Variant } from '#shared/contracts/variants.js';
+import type { Variant, VariantInput } from '#shared/contracts/variants.js';
 import type { DraftVariant } from './draft-variants.service.js';
 
-export function toVariant({ row, dates }: DraftVariant, updatedByName: string, mine: boolean): Variant {
+/** @param content with its giver named as they wish */
+export function toVariant(
+  { row, dates }: DraftVariant,
+  content: VariantInput,
+  updatedByName: string,
+  mine: boolean,
+): Variant {
   return {
     variantId: row.id,
     entryId: row.entryId,
-    content: row.content,
+    content,
     dates,
     updatedBy: updatedByName,
     updatedAt: row.updatedAt.toISOString(),

@@ -18,6 +18,7 @@ import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { entrySight } from '../../policy/entry-sight.js';
+import { withKeptGiver, withNaming } from '../../policy/giver-naming.js';
 import { isKept, maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing, sharedById } from '../../policy/sharing.repository.js';
 import { isTighterOrSame } from '#shared/contracts/sharing-tightness.js';
@@ -51,6 +52,7 @@ export class VariantsService {
     return this.change(calendarId, async (manager, calendar) => {
       const entry = await this.seenEntry(manager, actor, calendarId, entryId);
       await this.expectFits(manager, actor, content, '');
+      if (content.giver === '') throw invalidField('giver', 'required');
       if ((await manager.countBy(EntryVariantEntity, { entryId })) >= VARIANTS_MAX) {
         throw conflict('too-many-variants');
       }
@@ -76,14 +78,17 @@ export class VariantsService {
   async update(
     actor: Actor,
     { calendarId, entryId, variantId }: { calendarId: string; entryId: string; variantId: string },
-    { content, version }: VariantUpdate,
+    { content: written, version }: VariantUpdate,
   ): Promise<Variant> {
     return this.change(calendarId, async (manager, calendar) => {
       const entry = await this.seenEntry(manager, actor, calendarId, entryId);
       const row = await this.own(manager, actor, entryId, variantId);
       if (row.version !== version) {
-        throw stale(await this.one(manager, actor, calendar, entry, variantId), content);
+        throw stale(await this.one(manager, actor, calendar, entry, variantId), written);
       }
+      const shared = (await sharedById(manager, 'variant', [variantId])).get(variantId);
+      const content = withKeptGiver(await this.viewer(manager, actor), shared, row.content, written);
+      if (content.giver === '' && row.content.giver !== '') throw invalidField('content.giver', 'required');
       if (!sameJson(row.content, content)) {
         await this.expectFits(manager, actor, content, 'content.');
         await this.reshare(manager, actor, variantId, content);
@@ -211,9 +216,11 @@ export class VariantsService {
       manager,
       seen.map(({ row }) => row.updatedBy),
     );
-    return seen.map((variant) =>
-      toVariant(variant, names.get(variant.row.updatedBy) ?? '', isMine(viewer, shared.get(variant.row.id))),
-    );
+    return seen.map((variant) => {
+      const own = shared.get(variant.row.id);
+      const content = withNaming(viewer, own, variant.row.content);
+      return toVariant(variant, content, names.get(variant.row.updatedBy) ?? '', isMine(viewer, own));
+    });
   }
 
   private async one(

@@ -1,3 +1,4 @@
+import type { VariantInput } from '#shared/contracts/variants.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { wasPublished } from '#shared/calendar/version-state.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
@@ -72,6 +73,17 @@ export async function takeNameOffFrozen(manager: EntityManager, entryId: string)
     const nameless = canonicalJson({ ...body, content: { ...content, giver: '' } });
     if (nameless !== bodyText) {
       await manager.update(VersionEntryEntity, { id }, { bodyText: nameless, redacted: true });
+    }
+  }
+}
+
+/** The same of a timing beside an entry. */
+export async function takeNameOffFrozenVariant(manager: EntityManager, variantId: string): Promise<void> {
+  for (const { id, bodyText } of await manager.findBy(VersionVariantEntity, { variantId })) {
+    const body = JSON.parse(bodyText) as { content: VariantInput };
+    const nameless = canonicalJson({ ...body, content: { ...body.content, giver: '', giverId: null } });
+    if (nameless !== bodyText) {
+      await manager.update(VersionVariantEntity, { id }, { bodyText: nameless, redacted: true });
     }
   }
 }

@@ -5,7 +5,8 @@ import type { EntityManager } from 'typeorm';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
-import { withNaming } from '../../policy/giver-naming.js';
+import { anybody, withNaming } from '../../policy/giver-naming.js';
+import { sharedById } from '../../policy/sharing.repository.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { markerKeyOfLead, markerKeysOf, withUsedFigures } from '../calendars/sky-dates.service.js';
 
@@ -51,17 +52,24 @@ export function thingOf({ entryId, content }: Pick<VersionEntryBody, 'entryId' |
   return { entryId, markerKey: markerKeyOfLead(content.lead) };
 }
 
-/** Entries for the village's board: open and the village's, whoever prints it. */
+/** Entries for the village's board: open and the village's, with their givers as they wish, whoever prints it. */
 export async function entriesForVillage<B extends VersionEntryBody>(
   manager: EntityManager,
   viewer: Viewer,
   entries: readonly B[],
 ): Promise<B[]> {
-  const sight = await entrySight(manager, viewer, entries.map(thingOf));
+  const reader = anybody(viewer);
+  const sight = await entrySight(manager, reader, entries.map(thingOf));
+  const variantIds = entries.flatMap(({ variants = [] }) => variants.map(({ variantId }) => variantId));
+  const variantsShared = await sharedById(manager, 'variant', variantIds);
   return entries
     .filter((entry) => sight.isForVillage(thingOf(entry)))
-    .map(({ variants, ...entry }) => {
-      const forBoard = variants?.filter((variant) => variant.forBoard) ?? [];
+    .map(({ variants, ...rest }) => {
+      const entry = { ...rest, content: withNaming(reader, sight.sharedOf(rest.entryId), rest.content) };
+      const forBoard = (variants?.filter((variant) => variant.forBoard) ?? []).map((variant) => ({
+        ...variant,
+        content: withNaming(reader, variantsShared.get(variant.variantId), variant.content),
+      }));
       return (forBoard.length === 0 ? entry : { ...entry, variants: forBoard }) as B;
     });
 }
@@ -93,7 +101,8 @@ async function withSeenVariants<B extends VersionEntryBody>(
     const seen = (variants ?? []).flatMap((variant) => {
       const thing = byId.get(variant.variantId);
       if (thing === undefined || sight.appearance(thing) !== 'full') return [];
-      return [{ ...variant, forBoard: sight.isForVillage(thing) }];
+      const content = withNaming(viewer, sight.sharedOf(variant.variantId), variant.content);
+      return [{ ...variant, content, forBoard: sight.isForVillage(thing) }];
     });
     return (seen.length === 0 ? entry : { ...entry, variants: seen }) as B;
   });

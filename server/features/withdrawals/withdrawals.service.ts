@@ -20,11 +20,9 @@ import { isKept } from '../../policy/policy.js';
 import { viewerOf } from '../../policy/viewer.js';
 import type { WithdrawalList } from '../../storage/withdrawal-list.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { takeNameOffDraft } from '../calendars/entry-eraser.service.js';
-import { takeNamesOffTellings } from '../figures/figure-eraser.service.js';
-import { takeNameOffFrozen } from '../versions/frozen-eraser.service.js';
 import { hasSound, keepsWords } from '../attachments/attachment-eraser.service.js';
 import type { Eraser } from './eraser.service.js';
+import { takeNamesOff } from './name-removal.service.js';
 import { couldSee, lockOwn, mayResume } from './taking-back.service.js';
 import { vanish } from './vanishing.service.js';
 
@@ -130,12 +128,7 @@ export class WithdrawalsService {
     await inTransaction(this.dataSource, async (manager) => {
       const row = await lockOwn(manager, actor, this.clock.now(), { itemType, itemId });
       if (row.state === 'withdrawn') throw notFound();
-      if (itemType === 'entry') {
-        await takeNameOffDraft(manager, itemId);
-        await takeNameOffFrozen(manager, itemId);
-      } else if (itemType === 'figure' || itemType === 'story') await takeNamesOffTellings(manager, itemId);
-      const details = { ...row.details, naming: 'not-named' as const };
-      await manager.update(ItemSharingEntity, { itemType, itemId }, { details });
+      await takeNamesOff(manager, { itemType, itemId }, row.giverId);
       await this.record(manager, actor, row, 'name-taken-off', null);
     });
   }

@@ -279,12 +279,9 @@ export const texts = {
     giver: 'Who gave this knowledge',
     moreOfIt: 'Kind, picture, crop, caution',
     giverHint: 'A name, or how the person wants to be named.',
-    agreedToPrint: 'Asked, and agreed to print',
-    agreedToPrintHint: 'An entry of belief is never printed without it.',
+    beliefPrint:
+      'An entry of belief is printed by what was agreed about it alone. It is written down under “What was agreed”, once the entry is saved.',
     sharingLevel: 'Who may see it',
-    printing: 'Printing',
-    agreed: 'agreed to print',
-    notAgreed: 'not asked about printing',
   },
 
   marker: {
@@ -424,7 +421,6 @@ export const texts = {
       changeLastDate: 'Change the last date',
       writeSigns: 'Write other signs',
       fixedDate: 'Go by a fixed date',
-      agreed: 'The giver was asked and agreed',
     },
   },
 

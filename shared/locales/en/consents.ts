@@ -85,6 +85,7 @@ export const texts = {
     giver: 'Somebody of the village here',
     giverNobody: 'Somebody without an account',
     giverName: 'Name, as they wish to be called',
+    giverKept: 'They wish not to be named here. Their name stays as it was written down.',
     spokeFor: 'Who spoke for the group, and by what right',
     how: 'How they were asked',
     askedOn: 'Day',
@@ -210,6 +211,7 @@ export const texts = {
   },
 
   card: {
+    unnamed: 'the person who was asked',
     title: 'What was agreed',
     copy: 'A copy for {{name}}',
     about: 'About: {{thing}}',

@@ -137,6 +137,8 @@ export const texts = {
     skyline: { hills: 'this skyline', flat: 'flat horizon' },
     safeDays: '{{title}} (the safe days of all who count it)',
     ownDays: '{{title}} – as {{giver}} counts',
+    unnamedDays: '{{title}} – as others count',
+    byRole: 'an elder of the village',
     otherDays: '{{title}} – as {{giver}} counts',
     noDate: {
       'never-sets': 'the star never sets here, so it has no first or last day.',

@@ -51,8 +51,6 @@ export const texts = {
   giver: 'Given by {{giver}}',
   picture:
     'Days from {{from}} to {{to}}: early from {{earliest}}, best from {{bestFrom}} to {{bestTo}}, last {{last}}.',
-  printYes: 'Asked, and agreed to print.',
-  printNo: 'Nobody has agreed to print it.',
   kept: 'A difference is kept here',
   keptBy: '{{name}}: “{{note}}”',
   keptByVoice: '{{name}}, by voice',

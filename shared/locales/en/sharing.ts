@@ -73,6 +73,7 @@ export const texts = {
     kept: 'Its own people answer for it.',
     group: 'Group: {{name}}',
     givenBy: 'Given by {{name}}',
+    unnamed: 'Somebody who is not named',
     byRole: 'an elder of the village',
     successor: 'After the giver it is {{name}}’s to keep.',
     traceBlank: 'Others see an empty slot.',

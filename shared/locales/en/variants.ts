@@ -10,6 +10,7 @@ export const texts = {
   save: 'Keep this timing',
   saved: 'The timing stands beside the entry.',
   saveFirst: 'Save the entry first; then other timings can stand beside it.',
+  countsUnnamed: 'Others count it so:',
   counts: '{{giver}} counts it so:',
   noDays: 'It has no such days in {{year}}.',
   difference: {

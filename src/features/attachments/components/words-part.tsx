@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Attachment, AttachmentWords } from '#shared/contracts/attachments.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { useWriterWords } from '#src/lib/giver-words.js';
 import { Button } from '#src/ui/button.js';
 import { Well } from '#src/ui/surfaces.js';
 import { useLanguageNames } from '../model/use-language-names.js';
@@ -69,6 +70,7 @@ function Written({
 }) {
   const { t } = useTranslation('attachments');
   const { moment } = useDateWords();
+  const writer = useWriterWords();
   const { nameOf } = useLanguageNames(communityId);
   const { kind, language, text, authorName, updatedAt, checkedBySpeaker } = words;
   return (
@@ -78,7 +80,7 @@ function Written({
         {text}
       </p>
       <p className="mt-2 text-small text-umber-soft">
-        {t('words.author', { name: authorName, moment: moment(updatedAt) })}{' '}
+        {t('words.author', { name: writer(authorName), moment: moment(updatedAt) })}{' '}
         {checkedBySpeaker ? t('words.checked') : t('words.unchecked')}
       </p>
       {onChange !== null && (

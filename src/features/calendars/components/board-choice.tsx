@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { boardTiming, safetySideOf } from '#shared/calendar/variants.js';
 import type { Variant } from '#shared/contracts/variants.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
+import { useWriterWords } from '#src/lib/giver-words.js';
 import { TextField } from '#src/ui/field.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Care } from '#src/ui/surfaces.js';
@@ -13,6 +14,7 @@ type Board = NonNullable<FormState['draft']['board']>;
 export function BoardChoice({ form, variants }: { form: FormState; variants: readonly Variant[] }) {
   const { t } = useTranslation('variants');
   const words = useEntryWords();
+  const writer = useWriterWords();
   const { draft, content, dates, change, at } = form;
   const timings = variants.filter((variant) => variant.content.difference !== 'not-on-a-board');
   const side = safetySideOf(content);
@@ -52,7 +54,7 @@ export function BoardChoice({ form, variants }: { form: FormState; variants: rea
           { value: 'entry', label: t('board.entry.name'), note: t('board.entry.note') },
           ...timings.map((one) => ({
             value: one.variantId,
-            label: t('board.variant', { giver: one.content.giver }),
+            label: t('board.variant', { giver: writer(one.content.giver) }),
           })),
           { value: 'both', label: t('board.both.name'), note: t('board.both.note') },
         ]}

@@ -179,9 +179,6 @@ function goWay(way: Way, form: FormState, groups: Groups, search: () => void): v
     case 'useFirst':
       form.change(({ marker }) => ({ marker: { ...marker, occurrence: 1 } }));
       return;
-    case 'agreed':
-      form.change({ agreedToPrint: true });
-      return;
     case 'writeSigns':
       groups.goTo('signs');
       return;

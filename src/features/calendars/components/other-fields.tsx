@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { GIVER_BY_ROLE, PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { PersonSelect, SharingFields } from '#src/lib/sharing-fields.js';
-import { TextAreaField, TextField, TickField } from '#src/ui/field.js';
+import { TextAreaField, TextField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
 
 export function SignsFields({ form }: { form: FormState }) {
@@ -39,7 +39,7 @@ export function LateFields({ form }: { form: FormState }) {
 /** What an elder's own entry can be; everything wider is the officer's to write. */
 const KEPT_LEVELS = ['group', 'elders', 'sealed'] as const;
 
-/** Whose knowledge it is, what was agreed about it, and who may see it. */
+/** Whose knowledge it is, and who may see it. */
 export function WhoseFields({ form }: { form: FormState }) {
   const { t } = useTranslation(['calendars', 'sharing']);
   const { draft, change, at } = form;
@@ -58,15 +58,7 @@ export function WhoseFields({ form }: { form: FormState }) {
           }}
         />
       )}
-      <TickField
-        label={t('form.agreedToPrint')}
-        hint={t('form.agreedToPrintHint')}
-        checked={draft.agreedToPrint}
-        problem={at('agreedToPrint')}
-        onChange={(event) => {
-          change({ agreedToPrint: event.currentTarget.checked });
-        }}
-      />
+      {draft.kind === 'belief' && <p>{t('form.beliefPrint')}</p>}
       {!form.isKeepers && (
         <PersonSelect
           label={t('sharing:giver')}

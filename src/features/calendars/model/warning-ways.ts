@@ -9,14 +9,7 @@ import type { ShownEntry } from './preview-dates.js';
 export type Way =
   | {
       kind:
-        | 'otherStar'
-        | 'otherSign'
-        | 'useFirst'
-        | 'changeDays'
-        | 'changeLastDate'
-        | 'writeSigns'
-        | 'fixedDate'
-        | 'agreed';
+        'otherStar' | 'otherSign' | 'useFirst' | 'changeDays' | 'changeLastDate' | 'writeSigns' | 'fixedDate';
     }
   | { kind: 'otherDay'; phenomenon: Phenomenon };
 
@@ -40,7 +33,7 @@ export function waysOut(warning: EntryWarning, draft: EntryDraft, row: MarkerRow
     case 'window-shortened-by-last-date':
       return [{ kind: 'changeDays' }, { kind: 'changeLastDate' }];
     case 'belief-not-agreed-to-print':
-      return [{ kind: 'agreed' }];
+      return [];
     case 'windows-overlap':
       return [{ kind: 'changeDays' }];
   }

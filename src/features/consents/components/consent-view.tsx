@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { CONSENT_USES, type Consent, type ConsentUse } from '#shared/contracts/consents.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
+import { useWriterWords } from '#src/lib/giver-words.js';
 import { Button, ButtonAnchor } from '#src/ui/button.js';
 import { More } from '#src/ui/fold.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -25,13 +26,14 @@ export function ConsentView({
   const { t } = useTranslation('consents');
   const { communityId } = useCurrentCommunity();
   const dates = useDateWords();
+  const writer = useWriterWords();
   const facts = useConsentFacts()(consent);
   const { content, isMine, may, uses } = consent;
   const yes = CONSENT_USES.filter((use) => uses?.includes(use) === true);
   const no = CONSENT_USES.filter((use) => uses?.includes(use) !== true);
   return (
     <Board
-      title={<span className="own-words">{content.giverName}</span>}
+      title={<span className="own-words">{writer(content.giverName)}</span>}
       beside={<ConsentChips {...consent} />}
     >
       {yes.length > 0 && (
@@ -49,7 +51,7 @@ export function ConsentView({
         ))}
       </dl>
       <p className="mt-3 text-small text-umber-soft">
-        {t('sheet.recorded', { name: consent.recordedByName, day: dates.moment(consent.recordedAt) })}
+        {t('sheet.recorded', { name: writer(consent.recordedByName), day: dates.moment(consent.recordedAt) })}
       </p>
       <div className="mt-3 flex flex-wrap gap-3">
         {may.change && <Button onClick={onChange}>{t(isMine ? 'sheet.changeMine' : 'sheet.change')}</Button>}

@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { ConsentLine } from '#shared/contracts/consents.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { useWriterWords } from '#src/lib/giver-words.js';
 import { paths } from '#src/lib/paths.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import { ConsentChips } from './consent-chips.js';
@@ -11,6 +12,7 @@ import { Withdraw } from './withdraw.js';
 export function RegisterRow({ line }: { line: ConsentLine }) {
   const { t } = useTranslation('consents');
   const dates = useDateWords();
+  const writer = useWriterWords();
   const levelOf = useSharingWords();
   const { itemType, itemId, title, giverName, uses, may } = line;
   const item = t(`item.${itemType}`);
@@ -21,7 +23,7 @@ export function RegisterRow({ line }: { line: ConsentLine }) {
         {may.read ? <Link to={paths.itemConsents(itemType, itemId)}>{name}</Link> : name}
         <span className="text-umber-soft"> · {levelOf(line.level)}</span>
       </p>
-      {giverName !== null && <p className="own-words">{giverName}</p>}
+      {giverName !== null && <p className="own-words">{writer(giverName)}</p>}
       <ConsentChips state={line.state} isDue={line.isDue} />
       {uses !== null && uses.length > 0 && (
         <p className="text-small">

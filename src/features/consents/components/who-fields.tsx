@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { CONSENT_GIVERS } from '#shared/contracts/consents.js';
+import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import { useRoles } from '#src/lib/community.js';
 import { PersonSelect } from '#src/lib/sharing-fields.js';
 import { TextField } from '#src/ui/field.js';
@@ -10,6 +11,7 @@ import type { ConsentForm } from '../model/use-consent-form.js';
 /** Who is asked: one person, or somebody who speaks for a group. */
 export function WhoFields({ form: { draft, change, at } }: { form: ConsentForm }) {
   const { t } = useTranslation('consents');
+  const isKept = draft.giverName === GIVER_BY_ROLE;
   const readsPeople = useRoles().is('steward', 'officer', 'elder');
   return (
     <Board title={t('form.who')}>
@@ -37,7 +39,8 @@ export function WhoFields({ form: { draft, change, at } }: { form: ConsentForm }
           )}
           <TextField
             label={t('form.giverName')}
-            value={draft.giverName}
+            value={isKept ? '' : draft.giverName}
+            hint={isKept ? t('form.giverKept') : undefined}
             problem={at('giverName')}
             onChange={(event) => {
               change({ giverName: event.currentTarget.value });

@@ -5,6 +5,7 @@ import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
 import type { FigureDetail } from '#shared/contracts/figures.js';
 import { useCurrentCommunity, useRoles } from '#src/lib/community.js';
+import { useGiverWords } from '#src/lib/giver-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -77,6 +78,7 @@ export function FigurePage({ days, about }: FigurePageProps) {
 function Story({ figure }: { figure: FigureDetail }) {
   const { t } = useTranslation('figures');
   const lang = figure.names[0]?.tag;
+  const giverWords = useGiverWords();
   return (
     <Board title={t('page.story')}>
       {figure.story === '' ? (
@@ -89,7 +91,7 @@ function Story({ figure }: { figure: FigureDetail }) {
       {figure.variants.map(({ toldBy, text }, index) => (
         <Well key={index} className="mt-3">
           <p className="text-small text-umber-soft">
-            {toldBy === '' ? t('page.toldAlso') : t('page.toldBy', { who: toldBy })}
+            {toldBy === '' ? t('page.toldAlso') : t('page.toldBy', { who: giverWords(toldBy) })}
           </p>
           <p className="own-words whitespace-pre-line" lang={lang}>
             {text}

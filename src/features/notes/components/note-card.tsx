@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import type { Note } from '#shared/contracts/notes.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useKeptDraft } from '#src/lib/kept-draft.js';
+import { useWriterWords } from '#src/lib/giver-words.js';
 import { LevelChip } from '#src/lib/level-chip.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
@@ -84,11 +85,12 @@ function PinWords({ note: { pin } }: { note: Note }) {
 
 function Said({ name, at, text }: { name: string; at: string; text: string }) {
   const dates = useDateWords();
+  const nameOf = useWriterWords();
   return (
     <>
       <p className="whitespace-pre-line break-words">{text}</p>
       <p className="text-small text-umber-soft">
-        {name} · {dates.moment(at)}
+        {nameOf(name)} · {dates.moment(at)}
       </p>
     </>
   );

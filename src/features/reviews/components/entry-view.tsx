@@ -111,8 +111,7 @@ export function EntryView({
       )}
       <p className="text-umber-soft">
         {content.giver !== '' && `${t('giver', { giver: giverWords(content.giver) })}. `}
-        {sharing(content.sharingLevel, content.sharing)}.{' '}
-        {content.agreedToPrint ? t('printYes') : t('printNo')}
+        {sharing(content.sharingLevel, content.sharing)}.
       </p>
     </div>
   );

@@ -154,13 +154,9 @@ describe('the last date of an entry', () => {
 });
 
 describe('a belief entry', () => {
-  it('warns until it is asked and agreed to print; other kinds do not', () => {
+  it('carries no warning about print: what was agreed stands in the register, and a version does not freeze it', () => {
     const year = markerYear({ occurrences: [june] });
-    const warningsOf = (kind: string, agreedToPrint: boolean) =>
-      entryDatesOf(timing({ kind, agreedToPrint }), 2027, year).warnings;
-    expect(warningsOf('belief', false)).toEqual(['belief-not-agreed-to-print']);
-    expect(warningsOf('belief', true)).toEqual([]);
-    expect(warningsOf('community', false)).toEqual([]);
+    expect(entryDatesOf(timing({ kind: 'belief' }), 2027, year).warnings).toEqual([]);
   });
 });
 
