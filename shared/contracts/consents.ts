@@ -87,6 +87,8 @@ const consentFields = z.strictObject({
   passTo: line(120),
   /** Who may take it back besides the giver. */
   mayWithdraw: set(CONSENT_WITHDRAWERS),
+  /** The group of the village that is meant by family or group; left out where none is named. */
+  withdrawGroupId: id.nullable().optional(),
 });
 type ConsentFields = z.infer<typeof consentFields>;
 
@@ -101,6 +103,8 @@ function consentHolds(consent: ConsentFields, context: z.RefinementCtx): void {
   if (answer === 'given-with-conditions' && consent.conditions === '') refuse(['conditions'], 'required');
   if (consent.givenAs === 'group' && consent.spokeFor === '') refuse(['spokeFor'], 'required');
   if (consent.afterDeath === 'pass-to' && consent.passTo === '') refuse(['passTo'], 'required');
+  const byGroup = consent.mayWithdraw.includes('family') || consent.mayWithdraw.includes('group');
+  if ((consent.withdrawGroupId ?? null) !== null && !byGroup) refuse(['withdrawGroupId'], 'no-group-here');
   if (proof?.kind === 'witness' && proof.witness === '') refuse(['proof', 'witness'], 'required');
   if (proof?.kind === 'voice' && proof.attachmentId === null) refuse(['proof', 'attachmentId'], 'required');
   if (consent.until !== null && consent.until < consent.askedOn) refuse(['until'], 'before-asked');
@@ -157,6 +161,8 @@ export const itemConsents = z.strictObject({
   title: z.string().nullable(),
   giverId: id.nullable(),
   giverName: z.string(),
+  /** The giver, somebody who is named without an account, or nobody that is known here. */
+  whomToAsk: z.enum(['giver', 'named', 'nobody']),
   items: z.array(consent),
   mayAsk: z.boolean(),
 });

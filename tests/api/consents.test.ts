@@ -16,7 +16,7 @@ import {
 } from '#tests/support/asked-village.js';
 import { addEntry, entriesOf } from '#tests/support/calendar-api.js';
 import { addConsent, asked, consentContent, consentsPath } from '#tests/support/consent-api.js';
-import { sharingPath } from '#tests/support/sharing-api.js';
+import { addGroup, sharingPath } from '#tests/support/sharing-api.js';
 
 let api: TestApi;
 let village: AskedVillage;
@@ -125,6 +125,46 @@ describe('what is written down', () => {
 });
 
 describe('who may do what', () => {
+  it('lets the family or group that the giver named take it back, without reading what it is about', async () => {
+    const { elder, observer, staff, kept } = village;
+    const kin = await addGroup(elder, 'Kin of the terraces', [elder, observer]);
+    const consent = await addConsent(elder, 'entry', kept, {
+      ...{ giverId: elder.personId, mayWithdraw: ['family'], withdrawGroupId: kin.id },
+    });
+    expect(await registerOf(staff)).toEqual([]);
+    await withdrawConsent(staff, consent).expect(404);
+    expect(await registerOf(observer)).toMatchObject([
+      { id: consent.id, title: null, giverName: null, uses: null, may: { read: false, withdraw: true } },
+    ]);
+    await observer.get(consentsPath(observer, consent.id)).expect(404);
+    await withdrawConsent(observer, consent).expect(200);
+    expect((await registerOf(elder))[0]?.state).toBe('withdrawn');
+  });
+
+  it('lets elders whom the giver named take back what only giver and successor see', async () => {
+    const { elder, elder2 } = village;
+    const sealed = await addEntry(elder, village.calendarId, { sharingLevel: 'sealed' });
+    const given = { giverId: elder.personId, mayWithdraw: ['elders' as const] };
+    const consent = await addConsent(elder, 'entry', sealed.id, given);
+    expect(await registerOf(village.officer)).toEqual([]);
+    await withdrawConsent(elder2, consent).expect(200);
+  });
+
+  it('does not take the officer who wrote it down for its giver, and says that nobody is named', async () => {
+    const { officer, elder } = village;
+    const read = async (itemId: string) =>
+      (
+        await officer
+          .get(`/api/communities/${officer.communityId}/items/entry/${itemId}/consents`)
+          .expect(200)
+      ).body as ItemConsents;
+    expect(await read(village.feast)).toMatchObject({ giverId: null, whomToAsk: 'nobody' });
+    expect(await read(village.millet)).toMatchObject({ giverId: elder.personId, whomToAsk: 'giver' });
+    const mine = { ...consentContent({ giverId: officer.personId, proof: null }), itemType: 'entry' };
+    const said = await officer.post(consentsPath(officer), { ...mine, itemId: village.feast });
+    expect(refusedFields(said)).toEqual([['proof', 'proof-required']]);
+  });
+
   it('lets givers speak for themselves, whatever their role, and nobody else of theirs without a role', async () => {
     const { staff, observer } = village;
     const own = await addEntry(village.officer, village.calendarId, { giverId: observer.personId });

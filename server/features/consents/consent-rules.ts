@@ -3,34 +3,49 @@ import type { EntityManager } from 'typeorm';
 import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { ConsentEntity } from '../../db/entities/consent.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
+import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
-import type { Member } from '../../policy/viewer.js';
+import type { Member, Viewer } from '../../policy/viewer.js';
 import { conflict, invalidField } from '../../http/app-error.js';
 import { isOpen } from '../../policy/consents.js';
 import type { ConsentThing } from './consent-things.service.js';
 
 /** The giver, whoever gave the thing itself, and those who compile, review and sign, of what they see. */
 export function mayOf(
-  actor: Member,
-  row: Pick<ConsentEntity, 'giverId' | 'state'>,
+  viewer: Viewer,
+  row: Pick<ConsentEntity, 'giverId' | 'state' | 'details'>,
   thing: ConsentThing,
 ): ConsentLine['may'] {
-  const read = isGiver(actor, row, thing) || (thing.isSeen && keeps(actor));
+  const isGiver = row.giverId === viewer.personId || thing.giverId === viewer.personId;
+  const read = isGiver || (thing.isSeen && keeps(viewer));
   const isYes = row.state === 'given' || row.state === 'given-with-conditions';
   // Taking back is as easy as giving: the steward does it without reading what it is about.
-  return { read, change: read, withdraw: isYes && (read || hasRole(actor, 'steward')) };
+  return {
+    read,
+    change: read,
+    withdraw: isYes && (read || hasRole(viewer, 'steward') || isNamed(viewer, row, thing)),
+  };
+}
+
+/** Whom the giver named beside themself: elders, or the people of a family or group, without reading what it is about. */
+function isNamed(
+  { roles, groupIds }: Viewer,
+  { details: { mayWithdraw, withdrawGroupId = null } }: Pick<ConsentEntity, 'details'>,
+  { shared }: ConsentThing,
+): boolean {
+  if (mayWithdraw.includes('elders') && roles.includes('elder')) return true;
+  // A group that keeps the thing is meant where no other is named.
+  const groupId = withdrawGroupId ?? (mayWithdraw.includes('group') ? shared.details.groupId : null);
+  const byGroup = mayWithdraw.includes('family') || mayWithdraw.includes('group');
+  return byGroup && groupId !== null && groupIds.has(groupId);
 }
 
 export function mayAsk(actor: Member, thing: ConsentThing): boolean {
   return thing.giverId === actor.person.id || (thing.isSeen && keeps(actor));
 }
 
-function keeps(actor: Member): boolean {
+function keeps(actor: Pick<Member, 'roles'>): boolean {
   return hasRole(actor, 'officer', 'steward', 'elder');
-}
-
-function isGiver(actor: Member, { giverId }: Pick<ConsentEntity, 'giverId'>, thing: ConsentThing) {
-  return giverId === actor.person.id || thing.giverId === actor.person.id;
 }
 
 /** What was answered once is not asked as if for the first time: until a new yes it stays as it is. */
@@ -62,12 +77,16 @@ export function withProof(
 export async function expectKnown(
   manager: EntityManager,
   { communityId }: Actor,
-  { giverId, proof }: ConsentContent,
+  { giverId, proof, withdrawGroupId }: ConsentContent,
   consentId: string,
   prefix: string,
 ): Promise<void> {
   if (giverId !== null && !(await manager.existsBy(MembershipEntity, { communityId, personId: giverId }))) {
     throw invalidField(`${prefix}giverId`, 'not-of-this-village');
+  }
+  const groupId = withdrawGroupId ?? null;
+  if (groupId !== null && !(await manager.existsBy(VillageGroupEntity, { id: groupId, communityId }))) {
+    throw invalidField(`${prefix}withdrawGroupId`, 'unknown');
   }
   const attachmentId = proof?.attachmentId ?? null;
   if (attachmentId === null) return;

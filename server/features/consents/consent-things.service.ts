@@ -1,5 +1,6 @@
 import type { ConsentItemType } from '#shared/contracts/consents.js';
 import { In, type EntityManager } from 'typeorm';
+import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { figureIdOf } from '../../policy/entry-sight.js';
@@ -22,7 +23,10 @@ export interface ConsentThing {
   isShown: boolean;
   /** Null where it is not theirs to see, or has no name. */
   title: string | null;
-  /** The giver, where they are one of the village's people: not whoever wrote down what somebody else gave. */
+  /**
+   * The giver, where they are one of the village's people: not whoever wrote down what somebody else gave. An officer
+   * who compiles is a giver only where they are named as one.
+   */
   giverId: string | null;
   /** As the thing itself calls them; empty where it does not. */
   giverName: string;
@@ -59,6 +63,7 @@ export async function consentThings(
     story: await sharedById(manager, 'story', idsOf('story')),
     attachment: await sharedById(manager, 'attachment', idsOf('attachment')),
   };
+  const officerIds = await officersOf(manager, viewer.communityId);
   return ({ itemType, itemId }) => {
     const own = shared[itemType].get(itemId);
     if (own?.communityId !== viewer.communityId) return undefined;
@@ -72,11 +77,17 @@ export async function consentThings(
     const title = itemType === 'entry' ? entries.get(itemId)?.titleOfficer : names.get(itemId);
     const content = itemType === 'entry' ? entries.get(itemId) : undefined;
     const giverName = content?.giver ?? '';
-    const giverId = content?.giverId ?? (giverName === '' ? own.giverId : null);
+    const silent = own.giverId !== null && officerIds.has(own.giverId) ? null : own.giverId;
+    const giverId = content?.giverId ?? (giverName === '' ? silent : null);
     return { shared: own, isSeen, isShown, title: isSeen ? (title ?? null) : null, giverId, giverName };
   };
 }
 
 function none(): null {
   return null;
+}
+
+async function officersOf(manager: EntityManager, communityId: string): Promise<ReadonlySet<string>> {
+  const members = await manager.findBy(MembershipEntity, { communityId });
+  return new Set(members.filter(({ roles }) => roles.includes('officer')).map(({ personId }) => personId));
 }

@@ -43,7 +43,7 @@ export class ConsentsService {
     });
     const facts = await this.describe(manager, actor, rows);
     return facts
-      .filter(({ may }) => may.read || hasRole(actor, 'steward'))
+      .filter(({ may }) => may.read || may.withdraw || hasRole(actor, 'steward'))
       .map(toConsentLine)
       .toSorted((a, b) => Number(b.isDue) - Number(a.isDue));
   }
@@ -78,6 +78,7 @@ export class ConsentsService {
       title: thing.title,
       giverId: asks && isNamed ? giverId : null,
       giverName: asks && isNamed ? giverName || nameOf(giverId) : '',
+      whomToAsk: giverId !== null ? 'giver' : giverName !== '' ? 'named' : 'nobody',
       items: readable.map((facts) => toConsent(facts, nameOf(facts.row.recordedBy))),
       mayAsk: asks,
     };
@@ -116,11 +117,12 @@ export class ConsentsService {
   async change(actor: Actor, consentId: string, update: ConsentUpdate): Promise<Consent> {
     return this.write(actor, consentId, async (manager, row) => {
       const thing = await this.thing(manager, actor, row);
-      if (thing === undefined || !mayOf(actor, row, thing).read) throw notFound();
+      const viewer = await this.viewer(manager, actor);
+      if (thing === undefined || !mayOf(viewer, row, thing).read) throw notFound();
       if (row.version !== update.version) throw stale(await this.one(manager, actor, row), update.content);
       const content = withProof(
         actor,
-        withKeptName(await this.viewer(manager, actor), row, thing, update.content),
+        withKeptName(viewer, row, thing, update.content),
         row.giverId === actor.person.id ? row : thing,
         'content.',
       );
@@ -137,8 +139,8 @@ export class ConsentsService {
     return this.write(actor, consentId, async (manager, row) => {
       const thing = await this.thing(manager, actor, row);
       if (thing === undefined) throw notFound();
-      const may = mayOf(actor, row, thing);
-      if (!may.read && !hasRole(actor, 'steward')) throw notFound();
+      const may = mayOf(await this.viewer(manager, actor), row, thing);
+      if (!may.read && !may.withdraw && !hasRole(actor, 'steward')) throw notFound();
       if (row.version !== version) throw stale(await this.line(manager, actor, row), { version });
       if (!may.withdraw) throw conflict('nothing-to-withdraw');
       await this.update(manager, row, { state: 'withdrawn', uses: [], ...this.writer(actor) });
@@ -232,7 +234,7 @@ export class ConsentsService {
       if (thing === undefined) return [];
       const isMine = row.giverId === actor.person.id;
       const nameShown = consentName(viewer, row, thing);
-      return [{ row, thing, isMine, nameShown, may: mayOf(actor, row, thing), today: viewer.today }];
+      return [{ row, thing, isMine, nameShown, may: mayOf(viewer, row, thing), today: viewer.today }];
     });
   }
 

@@ -10,9 +10,9 @@ export async function readableConsent(
   viewer: Viewer,
   consentId: string,
 ): Promise<boolean> {
-  const { communityId, personId, roles } = viewer;
+  const { communityId } = viewer;
   const row = await manager.findOneBy(ConsentEntity, { id: consentId, communityId });
   if (row === null) return false;
   const thing = (await consentThings(manager, viewer, [row]))(row);
-  return thing !== undefined && mayOf({ person: { id: personId }, communityId, roles }, row, thing).read;
+  return thing !== undefined && mayOf(viewer, row, thing).read;
 }

@@ -1,12 +1,14 @@
 import type { AnswerWord } from '#shared/contracts/reviews.js';
 import type { Role } from '#shared/contracts/people.js';
 import { addDays, subDays } from 'date-fns';
-import type { DataSource } from 'typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import type { Actor } from '../../http/actor.js';
 import type { Clock } from '../../http/context.js';
+import { ConsentsService } from '../consents/consents.service.js';
+import { villageDay } from '../../policy/viewer.js';
 import { CalendarsService } from '../calendars/calendars.service.js';
 import { EntriesService } from '../calendars/entries.service.js';
 import { SkyDatesService } from '../calendars/sky-dates.service.js';
@@ -18,6 +20,7 @@ import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
 import { VariantsService } from '../variants/variants.service.js';
 import { DEMO_DOMAIN, UPPER_TAZIMEL } from './demo-villages.data.js';
+import { TAZIMEL_CONSENTS, WITHHELD_CODE } from './tazimel-consents.data.js';
 import { VARIANTS, WITHHELD_ENTRY } from './tazimel-beside.data.js';
 import { SECOND_ROUND, STANDING_DIFFERENCE, TAZIMEL_ENTRIES } from './tazimel-entries.data.js';
 
@@ -75,6 +78,7 @@ class DemoRound {
   private readonly calendars: CalendarsService;
   private readonly entries: EntriesService;
   private readonly variants: VariantsService;
+  private readonly consents: ConsentsService;
   private readonly publishing: PublishingService;
   private readonly answers: AnswersService;
   private readonly signing: SigningService;
@@ -82,11 +86,14 @@ class DemoRound {
   private withheldId = '';
   private readonly idByCode = new Map<string, string>();
 
+  private readonly manager: EntityManager;
+
   constructor(
     dataSource: DataSource,
     clock: Clock,
     private readonly cast: Cast,
   ) {
+    this.manager = dataSource.manager;
     this.at = subDays(clock.now(), 24);
     const playClock = { now: () => this.at };
     const sky = new SkyDatesService();
@@ -95,6 +102,7 @@ class DemoRound {
     this.calendars = new CalendarsService(dataSource, playClock);
     this.entries = new EntriesService(dataSource, playClock, sky);
     this.variants = new VariantsService(dataSource, playClock, sky);
+    this.consents = new ConsentsService(dataSource, playClock);
     this.publishing = new PublishingService(dataSource, playClock, contents, versions);
     this.answers = new AnswersService(dataSource, playClock, new CardSignInService(dataSource, playClock), {
       keepWith: () => Promise.reject(new Error('Nobody speaks in the demo')),
@@ -119,8 +127,26 @@ class DemoRound {
       const giverId = by === null ? null : this.cast[by].person.id;
       await this.variants.add(officer, id, this.idByCode.get(code) ?? '', { ...content, giverId });
     }
-    this.withheldId = (await this.entries.add(this.cast.elder3, id, WITHHELD_ENTRY)).id;
+    const { elder3 } = this.cast;
+    const withheld = { ...WITHHELD_ENTRY, giverId: elder3.person.id };
+    this.withheldId = (await this.entries.add(elder3, id, withheld)).id;
+    await this.agree();
     this.daysLater(3);
+  }
+
+  /** What was said to the officer who asked; what Elder A-3 keeps they agreed to themself. */
+  private async agree(): Promise<void> {
+    for (const { code, by, reviewInDays, said } of TAZIMEL_CONSENTS) {
+      const { person, communityId } = this.cast[by];
+      const isOwn = code === WITHHELD_CODE;
+      await this.consents.add(isOwn ? this.cast[by] : this.cast.officer, {
+        ...said,
+        ...{ itemType: 'entry', itemId: isOwn ? this.withheldId : this.idOf(code) },
+        ...{ giverId: person.id, giverName: person.displayName },
+        askedOn: await villageDay(this.manager, communityId, this.at),
+        reviewBy: await villageDay(this.manager, communityId, addDays(this.at, reviewInDays)),
+      });
+    }
   }
 
   /** Everybody agrees, and the village's rule signs. */

@@ -35,6 +35,8 @@ export const texts = {
     title: 'What was agreed',
     about: '{{item}}: {{title}}',
     nobody: 'Nobody has been asked about this yet',
+    whomToAsk:
+      'Nobody is named as its giver. Ask whoever told it, or the elders and the family that it comes from; whoever wrote it down cannot agree in their place.',
     nobodyBelief: 'An entry of belief is not printed until its giver has said yes.',
     nobodyHint: 'Until then the village keeps, shows and prints it at its level; nothing leaves the village.',
     ask: 'Write down what somebody says',
@@ -114,6 +116,8 @@ export const texts = {
     passTo: 'Who it passes to',
     mayWithdraw: 'Who else may take it back',
     mayWithdrawHint: 'The giver always may.',
+    withdrawGroup: 'Which group or family that is',
+    withdrawGroupNone: 'None of the village’s groups here',
     proof: 'Proof',
     proofHint: 'A yes needs one: their voice, a mark, a signature, or somebody who was there.',
     witness: 'Who was there',

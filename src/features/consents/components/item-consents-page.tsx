@@ -71,6 +71,11 @@ function Sheet({ thing, proofs }: { thing: ItemConsents; proofs: (consentId: str
           <p>{t('sheet.hidden')}</p>
         </Care>
       )}
+      {thing.mayAsk && thing.whomToAsk === 'nobody' && (
+        <Care>
+          <p>{t('sheet.whomToAsk')}</p>
+        </Care>
+      )}
       {thing.items.length === 0 && (
         <Board>
           <EmptyState title={t('sheet.nobody')}>

@@ -1,6 +1,9 @@
+import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { AFTER_DEATH, CONSENT_WITHDRAWERS } from '#shared/contracts/consents.js';
 import { NAMINGS } from '#shared/contracts/sharing.js';
+import { useCurrentCommunity } from '#src/lib/community.js';
+import { groupsQuery } from '#src/lib/sharing-queries.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -10,6 +13,8 @@ import { TickSet } from './tick-set.js';
 /** What goes with a yes: the name, how long it holds, what comes after, who may take it back. */
 export function RuleFields({ form: { draft, change, at } }: { form: ConsentForm }) {
   const { t } = useTranslation('consents');
+  const { communityId } = useCurrentCommunity();
+  const groups = useQuery(groupsQuery(communityId)).data ?? [];
   return (
     <Board title={t('form.rules')}>
       <div className="grid gap-4 mid:grid-cols-2">
@@ -30,9 +35,28 @@ export function RuleFields({ form: { draft, change, at } }: { form: ConsentForm 
           words={(who) => t(`withdrawer.${who}`)}
           chosen={draft.mayWithdraw}
           onChange={(mayWithdraw) => {
-            change({ mayWithdraw });
+            const byGroup = mayWithdraw.includes('family') || mayWithdraw.includes('group');
+            change({ mayWithdraw, ...(byGroup ? {} : { withdrawGroupId: null }) });
           }}
         />
+        {(draft.mayWithdraw.includes('family') || draft.mayWithdraw.includes('group')) && (
+          <SelectField
+            label={t('form.withdrawGroup')}
+            value={draft.withdrawGroupId ?? ''}
+            problem={at('withdrawGroupId')}
+            onChange={(event) => {
+              const chosen = event.currentTarget.value;
+              change({ withdrawGroupId: chosen === '' ? null : chosen });
+            }}
+          >
+            <option value="">{t('form.withdrawGroupNone')}</option>
+            {groups.map(({ id, name }) => (
+              <option key={id} value={id}>
+                {name}
+              </option>
+            ))}
+          </SelectField>
+        )}
         <TextField
           type="date"
           label={t('form.reviewBy')}
