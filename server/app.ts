@@ -4,6 +4,8 @@ import helmet from 'helmet';
 import { randomUUID } from 'node:crypto';
 import path from 'node:path';
 import { pinoHttp } from 'pino-http';
+import { afterDeathRoutes } from './features/after-death/after-death.routes.js';
+import { AfterDeathService } from './features/after-death/after-death.service.js';
 import { airRoutes } from './features/air/air.routes.js';
 import { AirService } from './features/air/air.service.js';
 import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
@@ -239,6 +241,7 @@ export function createApp(options: AppOptions): App {
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
+  afterDeathRoutes(mount, new AfterDeathService(dataSource, clock, withdrawals));
   withdrawalsRoutes(mount, withdrawals, new ItemStatesService(dataSource, clock));
   const operator = { hosting: config.hosting, sendsLetters: options.mailer !== null };
   privacyRoutes(

@@ -8,6 +8,8 @@ export const AUDIT_ACTIONS = [
   'roles-changed',
   'code-renewed',
   'membership-ended',
+  'death-noted',
+  'death-undone',
   'password-set',
   'devices-signed-out',
   'card-made',

@@ -1,4 +1,5 @@
 import type { Endpoint } from './endpoint.js';
+import { afterDeathEndpoints } from './after-death.js';
 import { airEndpoints } from './air.js';
 import { attachmentsEndpoints } from './attachments.js';
 import { auditEndpoints } from './audit.js';
@@ -35,6 +36,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   cardsEndpoints,
   lettersEndpoints,
   peopleEndpoints,
+  afterDeathEndpoints,
   placesEndpoints,
   starsEndpoints,
   skyMarkersEndpoints,

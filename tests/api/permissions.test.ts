@@ -263,6 +263,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
     // Nobody of these gave it or is asked for it: the thing stays.
     withdrawItem: () => ({ leavesTrace: true, askedById: village.place.id }),
+    noteDeath: () => ({ diedOn: '2026-11-01', removesForGood: false }),
     pauseItem: () => ({ askedById: village.place.id }),
     removeSound: () => ({ askedById: village.place.id }),
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),

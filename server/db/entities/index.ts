@@ -7,6 +7,7 @@ import { CalendarVersionEntity } from './calendar-version.entity.js';
 import { CalendarEntity } from './calendar.entity.js';
 import { CommunityEntity } from './community.entity.js';
 import { ConsentEntity } from './consent.entity.js';
+import { DeathEntity } from './death.entity.js';
 import { DraftContributionEntity } from './draft-contribution.entity.js';
 import { EntryEntity } from './entry.entity.js';
 import { FigureEntity } from './figure.entity.js';
@@ -43,6 +44,7 @@ export const ENTITIES = [
   FigureEntity,
   CalendarEntity,
   EntryEntity,
+  DeathEntity,
   DraftContributionEntity,
   CalendarVersionEntity,
   VersionEntryEntity,

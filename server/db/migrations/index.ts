@@ -13,6 +13,7 @@ import { Variants1798000000000 } from './1798000000000-variants.js';
 import { AnswersOfItsPeople1798200000000 } from './1798200000000-answers-of-its-people.js';
 import { ByEar1798300000000 } from './1798300000000-by-ear.js';
 import { BeliefConsents1798400000000 } from './1798400000000-belief-consents.js';
+import { Deaths1798410000000 } from './1798410000000-deaths.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -31,4 +32,5 @@ export const MIGRATIONS = [
   AnswersOfItsPeople1798200000000,
   ByEar1798300000000,
   BeliefConsents1798400000000,
+  Deaths1798410000000,
 ];

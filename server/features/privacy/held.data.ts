@@ -27,6 +27,7 @@ const row = (
 export const HELD: Readonly<Record<string, Held>> = {
   person: row('account', ['id'], 'all', ['password_hash']),
   membership: row('membership', ['person_id'], 'all'),
+  death: row('membership', ['person_id', 'noted_by'], ['died_on', 'noted_at']),
   community: row('membership', [], []),
   village_group: row('membership', [], []),
   group_member: row('membership', ['person_id'], 'all'),

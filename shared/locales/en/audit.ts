@@ -12,6 +12,8 @@ export const texts = {
     'person-added': '{{actor}} added {{subject}} as {{roles}}.',
     'roles-changed': '{{actor}} changed the roles of {{subject}} from {{before}} to {{after}}.',
     'code-renewed': '{{actor}} made a new code for {{subject}}.',
+    'death-noted': '{{actor}} noted that {{subject}} has died; what they chose for it was done.',
+    'death-undone': '{{actor}} undid the note that {{subject}} has died.',
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',
     'devices-signed-out': '{{actor}} signed out on other devices.',

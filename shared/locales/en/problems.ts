@@ -83,6 +83,9 @@ export const texts = {
     'part-differs': 'This part has come already with another content. Begin a new recording.',
     'part-missing': 'The part before this one has not come yet. Send that one first.',
     'too-many-attachments': 'At most 60 recordings and pictures belong to one thing. Remove one first.',
+    'death-noted': 'This is noted already.',
+    'removes-for-good': 'They chose that something is removed. Say once more that it will be gone for good.',
+    'removed-for-good': 'Something was removed for good, as they chose. That cannot be undone.',
     'nothing-written-out':
       'Nothing was written out from this recording yet. Write it out first, or take all of it back.',
     'not-yours': 'Only whoever added this can change or remove it.',
@@ -186,6 +189,7 @@ export const texts = {
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',
     'uses-need-yes': 'Ticks need a yes. Choose “Yes” above, or take the ticks out.',
     'words-not-there': 'These words do not stand in the text. Mark them in the text above.',
+    'in-the-future': 'This day has not come yet.',
     'before-asked': 'This day lies before the day of asking.',
     'answered-before': 'This was answered before. Write down a yes or a no.',
     'own-word-of-giver': 'Only the giver themself can say it here in their own word.',

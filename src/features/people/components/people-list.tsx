@@ -1,4 +1,5 @@
 import { KeyRound, Mail, Pencil, UserMinus } from 'lucide-react';
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { CommunityPerson } from '#shared/contracts/people.js';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -11,6 +12,8 @@ export interface PersonActions {
   onRemove: (person: CommunityPerson) => void;
   onRenewCode: (person: CommunityPerson) => void;
   onInvite: (person: CommunityPerson) => void;
+  /** What is seldom done, beside the others. */
+  quietly?: ((person: CommunityPerson) => ReactNode) | undefined;
 }
 
 /** Everybody of the village; with actions for the steward, without them for everybody else. */
@@ -67,6 +70,7 @@ function PersonRow({ person, actions }: { person: CommunityPerson; actions: Pers
               }}
             />
           )}
+          {!you && actions.quietly?.(person)}
         </div>
       )}
     </li>

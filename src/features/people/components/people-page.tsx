@@ -18,7 +18,7 @@ import { RolesDialog } from './roles-dialog.js';
 import { VillageTabs } from './village-tabs.js';
 
 /** Who belongs to the village. The steward adds people with a code and sets roles. */
-export function PeoplePage() {
+export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) {
   const { t } = useTranslation('people');
   const { communityId, communityName } = useCurrentCommunity();
   const isSteward = useRoles().is('steward');
@@ -37,7 +37,9 @@ export function PeoplePage() {
       {people.error !== null && (
         <TroubleNote sentence={words.problem(people.error)} onRetry={() => void people.refetch()} />
       )}
-      {people.data && <PeopleList people={people.data} actions={isSteward ? actions : null} />}
+      {people.data && (
+        <PeopleList people={people.data} actions={isSteward ? { ...actions, quietly } : null} />
+      )}
       {inner && !isSteward && <p className="mt-3 text-umber-soft">{t('list.onlySteward')}</p>}
     </Board>
   );
