@@ -233,7 +233,7 @@ export function createApp(options: AppOptions): App {
     new AttachmentWordsService(dataSource, clock),
   );
   sheetsRoutes(mount, new SheetsService(contents, versions, clock));
-  const consents = new ConsentsService(dataSource, clock);
+  const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);
   todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, consents, clock }));

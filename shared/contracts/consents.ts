@@ -40,6 +40,8 @@ export const CONSENT_PROOFS = ['own-word', 'voice', 'mark', 'signature', 'witnes
 export const AFTER_DEATH = ['keep', 'tighten', 'pass-to', 'remove'] as const;
 export const CONSENT_WITHDRAWERS = ['family', 'group', 'elders'] as const;
 
+/** A spoken yes of some minutes. */
+const CLIP_MAX_BYTES = 8 * 1024 * 1024;
 /** Asked again from this many days before the review date on. */
 export const DUE_AHEAD_DAYS = 30;
 /** Months until a consent is asked for again, where nobody says otherwise. */
@@ -124,6 +126,24 @@ export type ConsentInput = z.infer<typeof consentInput>;
 
 export const consentUpdate = z.strictObject({ content: consentContent, version: rowVersion });
 export type ConsentUpdate = z.infer<typeof consentUpdate>;
+
+/** The same with a clip of the giver's voice in the same sending: the clip is the proof. */
+const spokenFields = consentFields.omit({ proof: true });
+function spokenHolds(consent: z.infer<typeof spokenFields>, context: z.RefinementCtx): void {
+  consentHolds({ ...consent, proof: null }, context);
+}
+export const spokenConsentInput = spokenFields
+  .extend({ itemType: z.enum(CONSENT_ITEMS), itemId: id })
+  .superRefine(spokenHolds)
+  .superRefine(({ giverName }, context) => {
+    if (giverName === '') context.addIssue({ code: 'custom', path: ['giverName'], message: 'required' });
+  });
+export type SpokenConsentInput = z.infer<typeof spokenConsentInput>;
+export const spokenConsentUpdate = z.strictObject({
+  content: spokenFields.superRefine(spokenHolds),
+  version: rowVersion,
+});
+export type SpokenConsentUpdate = z.infer<typeof spokenConsentUpdate>;
 export const consentWithdrawal = z.strictObject({ version: rowVersion });
 
 /** A line of the register. What it is about, who gave it and for what are for those who may see the thing itself. */
@@ -229,6 +249,29 @@ export const consentsEndpoints = {
     access: member('community', ...ROLES),
     params: consentParams,
     body: consentUpdate,
+    response: consent,
+  }),
+  addSpoken: defineEndpoint({
+    id: 'addSpokenConsent',
+    method: 'POST',
+    path: '/api/communities/:communityId/consents/spoken',
+    summary: 'Write down what somebody says together with a clip of their voice, or neither of the two',
+    access: member('community', ...ROLES),
+    params: communityParams,
+    body: spokenConsentInput,
+    upload: { maxBytes: CLIP_MAX_BYTES },
+    response: consent,
+    status: 201,
+  }),
+  changeSpoken: defineEndpoint({
+    id: 'changeSpokenConsent',
+    method: 'POST',
+    path: '/api/communities/:communityId/consents/:consentId/spoken',
+    summary: 'Write down a new answer together with a clip of their voice; 409 with both when it was changed',
+    access: member('community', ...ROLES),
+    params: consentParams,
+    body: spokenConsentUpdate,
+    upload: { maxBytes: CLIP_MAX_BYTES },
     response: consent,
   }),
   withdraw: defineEndpoint({

@@ -16,6 +16,8 @@ import {
 } from '#tests/support/asked-village.js';
 import { addEntry, entriesOf } from '#tests/support/calendar-api.js';
 import { addConsent, asked, consentContent, consentsPath } from '#tests/support/consent-api.js';
+import { webm } from '#tests/support/media.js';
+import { filesWith } from '#tests/support/search-everything.js';
 import { addGroup, sharingPath } from '#tests/support/sharing-api.js';
 
 let api: TestApi;
@@ -121,6 +123,51 @@ describe('what is written down', () => {
     expect(await naming()).toBe('role');
     const entry = (await entriesOf(officer, village.calendarId)).find(({ id }) => id === village.millet);
     expect(entry?.content.sharing?.naming).toBe('role');
+  });
+});
+
+describe('a yes that is recorded with the form', () => {
+  const spoken = () => {
+    const { proof: _clip, ...said } = consentContent({ uses: ['keep', 'show', 'print'] });
+    return said;
+  };
+
+  it('is kept with the clip that proves it, in one step, and plays', async () => {
+    const { officer, millet } = village;
+    const path = consentsPath(officer, '', '/spoken');
+    const sent = officer.upload(
+      path,
+      { ...spoken(), itemType: 'entry', itemId: millet },
+      webm({ note: 'Yes' }),
+    );
+    const { content } = (await sent.expect(201)).body as Consent;
+    expect(content.proof).toMatchObject({ kind: 'voice' });
+    const heard = `/api/attachments/${content.proof?.attachmentId ?? ''}/parts/1`;
+    expect((await village.elder2.get(heard)).status).toBe(200);
+    expect((await village.staff.get(heard)).status).toBe(404);
+  });
+
+  it('leaves neither words nor clip where one of the two is refused', async () => {
+    const { officer, millet } = village;
+    const path = consentsPath(officer, '', '/spoken');
+    const body = { ...spoken(), itemType: 'entry', itemId: millet };
+    await officer.upload(path, body, Buffer.from('no sound')).expect(422);
+    const stranger = { ...body, giverId: millet };
+    await officer.upload(path, stranger, webm({ note: 'Yes' })).expect(422);
+    expect(await registerOf(officer)).toEqual([]);
+    expect(await api.dataSource.query('SELECT id FROM attachment')).toEqual([]);
+    expect(filesWith(api, 'Yes')).toEqual([]);
+  });
+
+  it('can stand for a new answer, too', async () => {
+    const { officer, millet } = village;
+    const consent = await addConsent(officer, 'entry', millet, asked());
+    const path = consentsPath(officer, consent.id, '/spoken');
+    const sent = officer.upload(path, { content: spoken(), version: consent.version }, webm({ note: 'Yes' }));
+    expect((await sent.expect(200)).body).toMatchObject({
+      state: 'given',
+      content: { proof: { kind: 'voice' } },
+    });
   });
 });
 

@@ -269,6 +269,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
     changeConsent: () => ({ content: asked(), ...stale }),
     withdrawConsent: () => stale,
+    addSpokenConsent: () => ({ ...withoutProof(), itemType: 'entry', itemId: village.entryId }),
+    changeSpokenConsent: () => ({ content: withoutProof(), ...stale }),
     changeSharing: () => ({ sharing: { level: 'village', ...PLAIN_DETAILS }, ...stale }),
     reorderEntries: () => ({ entryIds: [village.entryId] }),
     askChanges: () => ({ reason: 'taken-back', note: '' }),
@@ -393,4 +395,10 @@ async function homeOf(officer: Client): Promise<{ community: Community; place: P
     community: (await officer.get(`/api/communities/${communityId}`).expect(200)).body as Community,
     place: (await officer.get(`/api/places/${row.id}`).expect(200)).body as Place,
   };
+}
+
+/** What is sent with a clip, which is its proof. */
+function withoutProof() {
+  const { proof: _clip, ...said } = asked();
+  return said;
 }

@@ -16,14 +16,14 @@ import type {
 /** What a proof belongs to, and whose it is. Whoever sees that may hear or see the proof. */
 export interface ProofOf {
   communityId: string;
-  subjectType: Extract<AttachmentInput['subjectType'], 'answer' | 'meeting'>;
+  subjectType: Extract<AttachmentInput['subjectType'], 'answer' | 'meeting' | 'consent'>;
   subjectId: string;
   speaker: string;
   giverId: string;
   addedBy: string;
 }
 
-type Attach = (manager: EntityManager, proof: ProofOf) => Promise<string>;
+export type Attach = (manager: EntityManager, proof: ProofOf) => Promise<string>;
 
 /** A voice or a paper that comes with what it proves, and is kept in the same step or not at all. */
 export class ProofsService {

@@ -19,6 +19,12 @@ export function consentsRoutes(mount: Mount, consents: ConsentsService, cards: C
   mount.forMember(consentsEndpoints.change, ({ params, body }, actor) =>
     consents.change(actor, params.consentId, body),
   );
+  mount.forMemberUpload(consentsEndpoints.addSpoken, ({ body }, actor, file) =>
+    consents.addSpoken(actor, body, file),
+  );
+  mount.forMemberUpload(consentsEndpoints.changeSpoken, ({ params, body }, actor, file) =>
+    consents.changeSpoken(actor, params.consentId, body, file),
+  );
   mount.forMember(consentsEndpoints.withdraw, ({ params, body }, actor) =>
     consents.withdraw(actor, params.consentId, body.version),
   );

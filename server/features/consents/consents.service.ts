@@ -4,6 +4,8 @@ import type {
   ConsentItemType,
   ConsentLine,
   ConsentUpdate,
+  SpokenConsentInput,
+  SpokenConsentUpdate,
   ItemConsents,
 } from '#shared/contracts/consents.js';
 import { randomUUID } from 'node:crypto';
@@ -16,9 +18,12 @@ import type { Clock } from '../../http/context.js';
 import { settleShownUntil } from '../../policy/consent.repository.js';
 import { lockSharing } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import type { IncomingFile } from '../attachments/attachment-files.service.js';
+import type { Attach, ProofsService } from '../attachments/proofs.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { narrowNaming } from './agreed-naming.js';
 import { recordConsent, type ConsentAction } from './consent-audit.js';
+import { withClip } from './consent-clip.js';
 import { asksByName, consentName, withKeptName } from './consent-names.js';
 import { expectAnswerFollows, expectKnown, expectMayAsk, mayAsk, mayOf, withProof } from './consent-rules.js';
 import { consentThings, type ConsentThing, type ThingRef } from './consent-things.service.js';
@@ -32,6 +37,7 @@ export class ConsentsService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
+    private readonly proofs: Pick<ProofsService, 'keepWith'>,
   ) {}
 
   /** Next to be asked again first. */
@@ -89,13 +95,36 @@ export class ConsentsService {
     return this.one(manager, actor, await this.expectThere(manager, actor, consentId));
   }
 
-  async add(actor: Actor, { itemType, itemId, ...input }: ConsentInput): Promise<Consent> {
+  /** The clip is kept with the words that it proves, or neither is. */
+  async addSpoken(actor: Actor, input: SpokenConsentInput, file: IncomingFile): Promise<Consent> {
+    return this.proofs.keepWith('recording', file, (attach) =>
+      this.add(actor, { ...input, proof: null }, attach),
+    );
+  }
+
+  async changeSpoken(
+    actor: Actor,
+    consentId: string,
+    { content, version }: SpokenConsentUpdate,
+    file: IncomingFile,
+  ): Promise<Consent> {
+    return this.proofs.keepWith('recording', file, (attach) =>
+      this.change(actor, consentId, { content: { ...content, proof: null }, version }, attach),
+    );
+  }
+
+  async add(
+    actor: Actor,
+    { itemType, itemId, ...written }: ConsentInput,
+    attach: Attach | null = null,
+  ): Promise<Consent> {
     const id = randomUUID();
     return inTransaction(this.dataSource, async (manager) => {
       await lockSharing(manager, itemType, itemId);
       const thing = await this.thing(manager, actor, { itemType, itemId });
       if (thing === undefined || !thing.isSeen) throw notFound();
       expectMayAsk(actor, thing);
+      const input = await withClip(manager, actor, id, written, attach);
       const content = withProof(actor, input, thing, '');
       await expectKnown(manager, actor, content, id, '');
       const { giverId } = content;
@@ -114,7 +143,12 @@ export class ConsentsService {
     });
   }
 
-  async change(actor: Actor, consentId: string, update: ConsentUpdate): Promise<Consent> {
+  async change(
+    actor: Actor,
+    consentId: string,
+    update: ConsentUpdate,
+    attach: Attach | null = null,
+  ): Promise<Consent> {
     return this.write(actor, consentId, async (manager, row) => {
       const thing = await this.thing(manager, actor, row);
       const viewer = await this.viewer(manager, actor);
@@ -122,7 +156,7 @@ export class ConsentsService {
       if (row.version !== update.version) throw stale(await this.one(manager, actor, row), update.content);
       const content = withProof(
         actor,
-        withKeptName(viewer, row, thing, update.content),
+        await withClip(manager, actor, consentId, withKeptName(viewer, row, thing, update.content), attach),
         row.giverId === actor.person.id ? row : thing,
         'content.',
       );

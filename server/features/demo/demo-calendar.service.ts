@@ -102,11 +102,11 @@ class DemoRound {
     this.calendars = new CalendarsService(dataSource, playClock);
     this.entries = new EntriesService(dataSource, playClock, sky);
     this.variants = new VariantsService(dataSource, playClock, sky);
-    this.consents = new ConsentsService(dataSource, playClock);
+    const unspoken = { keepWith: () => Promise.reject(new Error('Nobody speaks in the demo')) };
+    this.consents = new ConsentsService(dataSource, playClock, unspoken);
     this.publishing = new PublishingService(dataSource, playClock, contents, versions);
-    this.answers = new AnswersService(dataSource, playClock, new CardSignInService(dataSource, playClock), {
-      keepWith: () => Promise.reject(new Error('Nobody speaks in the demo')),
-    });
+    const cardSignIn = new CardSignInService(dataSource, playClock);
+    this.answers = new AnswersService(dataSource, playClock, cardSignIn, unspoken);
     this.signing = new SigningService(dataSource, playClock, versions);
   }
 

@@ -214,6 +214,16 @@ export const texts = {
     commercial: { short: 'sale', name: 'Sell it, or sell with it', why: 'Somebody earns money with it.' },
   },
 
+  clip: {
+    lead: 'Let them say in their own words what they agree to. It is kept with this form, or not at all.',
+    record: 'Record their yes',
+    again: 'Record it again',
+    stop: 'Stop',
+    listen: 'Listen to it',
+    goesAlong: 'It goes along when you write this down.',
+    refused: 'The microphone is not open to this page. Allow it in the browser, or choose another proof.',
+  },
+
   card: {
     unnamed: 'the person who was asked',
     title: 'What was agreed',

@@ -9,6 +9,7 @@ import {
 } from '#shared/contracts/consents.js';
 import { fillPath } from '#shared/contracts/endpoint.js';
 import { callApi } from '#src/lib/api-client.js';
+import { uploadToApi } from '#src/lib/api-upload.js';
 
 export interface ThingRef {
   communityId: string;
@@ -53,11 +54,28 @@ export function useSaveConsent({ communityId, itemType, itemId }: ThingRef) {
     mutationFn: ({
       content,
       over,
+      clip,
     }: {
       content: ConsentContent;
       over: Pick<Consent, 'id' | 'version'> | null;
-    }) =>
-      over === null
+      /** Their voice, as the proof: it is sent with the words, or neither is kept. */
+      clip: Blob | null;
+    }) => {
+      if (clip !== null) {
+        const { proof: _clip, ...said } = content;
+        return over === null
+          ? uploadToApi(consentsEndpoints.addSpoken, {
+              params: { communityId },
+              body: { ...said, itemType, itemId },
+              file: clip,
+            })
+          : uploadToApi(consentsEndpoints.changeSpoken, {
+              params: { communityId, consentId: over.id },
+              body: { content: said, version: over.version },
+              file: clip,
+            });
+      }
+      return over === null
         ? callApi(consentsEndpoints.add, {
             params: { communityId },
             body: { ...content, itemType, itemId },
@@ -65,7 +83,8 @@ export function useSaveConsent({ communityId, itemType, itemId }: ThingRef) {
         : callApi(consentsEndpoints.change, {
             params: { communityId, consentId: over.id },
             body: { content, version: over.version },
-          }),
+          });
+    },
     onSuccess: useForgetWhatItChanges(),
   });
 }

@@ -5,6 +5,7 @@ import type { ConsentProof } from '#shared/contracts/consents.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
+import { ClipFields } from './clip-fields.js';
 import { proofsQuery } from '../api/consents-api.js';
 import type { ConsentForm } from '../model/use-consent-form.js';
 
@@ -12,7 +13,7 @@ const KINDS = ['voice', 'mark', 'signature', 'witness'] as const;
 
 /** What shows that they said so. A voice or a picture belongs to a consent that is written down already. */
 export function ProofFields({
-  form: { draft, change, at },
+  form,
   communityId,
   consentId,
 }: {
@@ -25,7 +26,9 @@ export function ProofFields({
     ...proofsQuery(communityId, consentId ?? ''),
     enabled: consentId !== null,
   });
+  const { draft, change, at } = form;
   const { proof } = draft;
+  const hasClip = proof?.kind === 'voice' && form.voice.clip !== null;
   const set = (changed: Partial<ConsentProof>) => {
     change({ proof: { kind: 'witness', witness: '', attachmentId: null, ...proof, ...changed } });
   };
@@ -45,7 +48,8 @@ export function ProofFields({
           }}
           options={KINDS.map((value) => ({ value, label: t(`proof.${value}`) }))}
         />
-        {proof !== null && proof.kind !== 'witness' && (
+        {proof?.kind === 'voice' && form.voice.canRecord && <ClipFields voice={form.voice} />}
+        {proof !== null && proof.kind !== 'witness' && !hasClip && (
           <SelectField
             label={t('form.proofFile')}
             hint={offered.length === 0 ? t('form.proofFileHint') : undefined}

@@ -3,8 +3,9 @@ import { consent as consentSchema, type Consent } from '#shared/contracts/consen
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { useKeptDraft } from '#src/lib/kept-draft.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { useVoiceClip, type VoiceClip } from '#src/lib/voice-clip.js';
 import { useSaveConsent, type ThingRef } from '../api/consents-api.js';
-import { isDraft, problemsOf, toSend, type ConsentDraft } from './consent-draft.js';
+import { isDraft, isYes, problemsOf, toSend, type ConsentDraft } from './consent-draft.js';
 
 export interface ConsentForm {
   draft: ConsentDraft;
@@ -14,6 +15,8 @@ export interface ConsentForm {
   overall: string | undefined;
   /** What somebody else wrote meanwhile; saving once more puts this one in its place. */
   newer: Consent | null;
+  /** A clip of their voice, which goes with the form as its proof. */
+  voice: VoiceClip;
   busy: boolean;
   save: (onDone: () => void) => Promise<void>;
   drop: () => void;
@@ -27,6 +30,8 @@ export function useConsentForm(thing: ThingRef, over: Consent | null, start: Con
   const [said, setSaid] = useState<ReadonlyMap<string, string>>(new Map());
   const [newer, setNewer] = useState<Consent | null>(null);
 
+  const voice = useVoiceClip();
+
   const change = (changed: Partial<ConsentDraft>) => {
     const next = { ...draft, ...changed };
     setDraft(next);
@@ -34,12 +39,14 @@ export function useConsentForm(thing: ThingRef, over: Consent | null, start: Con
     kept.keepDraft(next, over?.version ?? null);
   };
   const save = async (onDone: () => void) => {
-    const problems = problemsOf(draft);
+    const clip = draft.proof?.kind === 'voice' && isYes(draft.answer) ? voice.clip : null;
+    const problems = problemsOf(clip === null ? draft : { ...draft, proof: null });
     setSaid(new Map([...problems].map(([field, code]) => [field, words.field(code)])));
     if (problems.size > 0) return;
     try {
-      await saving.mutateAsync({ content: toSend(draft), over: newer ?? over });
+      await saving.mutateAsync({ content: toSend(draft), over: newer ?? over, clip });
       kept.dropDraft();
+      voice.drop();
       onDone();
     } catch (cause) {
       const current =
@@ -64,6 +71,7 @@ export function useConsentForm(thing: ThingRef, over: Consent | null, start: Con
     at: (field) => [...said].find(([path]) => path === field || path.startsWith(`${field}.`))?.[1],
     overall: said.get(''),
     newer,
+    voice,
     busy: saving.isPending,
     save,
     drop: kept.dropDraft,
