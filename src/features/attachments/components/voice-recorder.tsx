@@ -33,14 +33,7 @@ const TITLES = {
 } as const satisfies Record<RecorderStep, string>;
 
 /** Who speaks – the agreement – record – stop – listen – keep. One step at a time. */
-export function VoiceRecorder({
-  communityId,
-  subject,
-  circle,
-  found,
-  onDone,
-  onKept,
-}: VoiceRecorderProps) {
+export function VoiceRecorder({ communityId, subject, circle, found, onDone, onKept }: VoiceRecorderProps) {
   const { t } = useTranslation(['attachments', 'common']);
   const personId = useSession().person?.id ?? '';
   const recorder = useRecorder({ ...subject, communityId, personId, found });
