@@ -15,7 +15,13 @@ import {
   type AskedVillage,
 } from '#tests/support/asked-village.js';
 import { addEntry, entriesOf } from '#tests/support/calendar-api.js';
-import { addConsent, asked, consentContent, consentsPath } from '#tests/support/consent-api.js';
+import {
+  addConsent,
+  asked,
+  consentContent,
+  consentsPath,
+  spokenContent,
+} from '#tests/support/consent-api.js';
 import { webm } from '#tests/support/media.js';
 import { filesWith } from '#tests/support/search-everything.js';
 import { addGroup, sharingPath } from '#tests/support/sharing-api.js';
@@ -127,10 +133,7 @@ describe('what is written down', () => {
 });
 
 describe('a yes that is recorded with the form', () => {
-  const spoken = () => {
-    const { proof: _clip, ...said } = consentContent({ uses: ['keep', 'show', 'print'] });
-    return said;
-  };
+  const spoken = () => spokenContent({ answer: 'given', uses: ['keep', 'show', 'print'] });
 
   it('is kept with the clip that proves it, in one step, and plays', async () => {
     const { officer, millet } = village;

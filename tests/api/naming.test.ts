@@ -112,7 +112,7 @@ describe('a giver who is not named', () => {
     // What people wrote themselves is theirs to take along, the name in it, too.
     expect(await readsAt(village.officer, NAME, given)).toEqual(['/api/privacy/own-data']);
     expect((await readsAt(village.elder, NAME, given)).length).toBeGreaterThan(4);
-  });
+  }, 120_000);
 
   it('is known to the steward in the register alone, who has to know whom to ask again', async () => {
     const given = await give('not-named');
@@ -188,7 +188,7 @@ describe('a name that is taken off an entry', () => {
       expect(await readsAt(client, NAME, given)).toEqual([]);
     }
     expect(await tablesWith(api, NAME)).toEqual([]);
-  });
+  }, 120_000);
 
   it('leaves the names of others who gave beside it', async () => {
     const { entry } = await give('named');

@@ -23,7 +23,7 @@ import {
   says,
   submit,
 } from '#tests/support/calendar-api.js';
-import { addConsent, asked } from '#tests/support/consent-api.js';
+import { addConsent, asked, spokenContent } from '#tests/support/consent-api.js';
 import { addPicture, attachmentInput } from '#tests/support/attachment-api.js';
 import { addFigure, figureInput } from '#tests/support/figure-api.js';
 import { plainPicture } from '#tests/support/media.js';
@@ -269,8 +269,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
     changeConsent: () => ({ content: asked(), ...stale }),
     withdrawConsent: () => stale,
-    addSpokenConsent: () => ({ ...withoutProof(), itemType: 'entry', itemId: village.entryId }),
-    changeSpokenConsent: () => ({ content: withoutProof(), ...stale }),
+    addSpokenConsent: () => ({ ...spokenContent(), itemType: 'entry', itemId: village.entryId }),
+    changeSpokenConsent: () => ({ content: spokenContent(), ...stale }),
     changeSharing: () => ({ sharing: { level: 'village', ...PLAIN_DETAILS }, ...stale }),
     reorderEntries: () => ({ entryIds: [village.entryId] }),
     askChanges: () => ({ reason: 'taken-back', note: '' }),
@@ -395,10 +395,4 @@ async function homeOf(officer: Client): Promise<{ community: Community; place: P
     community: (await officer.get(`/api/communities/${communityId}`).expect(200)).body as Community,
     place: (await officer.get(`/api/places/${row.id}`).expect(200)).body as Place,
   };
-}
-
-/** What is sent with a clip, which is its proof. */
-function withoutProof() {
-  const { proof: _clip, ...said } = asked();
-  return said;
 }

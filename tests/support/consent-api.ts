@@ -34,6 +34,12 @@ export function asked(changes: Partial<ConsentContent> = {}): ConsentContent {
   return consentContent({ answer: 'asked', proof: null, uses: [], naming: null, ...changes });
 }
 
+/** What is sent together with a clip, which is its proof. */
+export function spokenContent(changes: Partial<ConsentContent> = {}): Omit<ConsentContent, 'proof'> {
+  const { proof: _clip, ...said } = asked(changes);
+  return said;
+}
+
 export function consentsPath({ communityId }: Client, consentId = '', rest = ''): string {
   return `/api/communities/${communityId}/consents${consentId === '' ? '' : `/${consentId}`}${rest}`;
 }

@@ -129,7 +129,7 @@ export async function furnishLevels(
   }
   const forElders = plant('note', plainAt('elders'));
   const note = await addNote(elder, { subjectId: open.id, text: forElders, level: 'elders' });
-  const spoken = plant('recording to a note for the elders', plainAt('elders'));
+  const spoken = plant('recording', plainAt('elders'));
   const heard = { title: spoken, speaker: spoken, sharingLevel: 'village' } as const;
   attachmentIds.push((await addRecording(elder, note.id, { subjectType: 'note', ...heard })).id);
   const elders = figureAt('elders');

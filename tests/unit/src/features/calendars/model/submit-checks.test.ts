@@ -22,11 +22,12 @@ describe('before the draft is submitted', () => {
   });
 
   it('names unsaved entries, remarks and farm work without a rule for being late, and lets them go', () => {
-    const belief = shown(2, { kind: 'belief', ifLate: '' });
-    const checks = submitChecks([shown(1, { ifLate: 'Ask.' }, true), belief, shown(3)], contacts, null);
+    const lastDate = { date: { month: 6, day: 20 }, source: 'Water committee' };
+    const shortened = shown(2, { kind: 'household', ifLate: '', hasLastDate: true, lastDate });
+    const checks = submitChecks([shown(1, { ifLate: 'Ask.' }, true), shortened, shown(3)], contacts, null);
     expect(checks.missing).toEqual([]);
     expect(checks.unsaved.map(({ id }) => id)).toEqual([shown(1).id]);
-    expect(checks.remarked.map(({ id }) => id)).toEqual([belief.id]);
+    expect(checks.remarked.map(({ id }) => id)).toEqual([shortened.id]);
     expect(checks.withoutLate.map(({ id }) => id)).toEqual([shown(3).id]);
     expect(checks).toMatchObject({ entryCount: 3, markerCount: 1 });
   });

@@ -9,7 +9,9 @@ const markers = await tazimelMarkers();
 
 describe('ways out of a warning', () => {
   it('exist for every warning', () => {
-    for (const warning of ENTRY_WARNINGS) {
+    // What older versions froze about print is answered in the register, not in the form.
+    const here = ENTRY_WARNINGS.filter((warning) => warning !== 'belief-not-agreed-to-print');
+    for (const warning of here) {
       expect(waysOut(warning, newDraft(), null), warning).not.toEqual([]);
     }
   });
