@@ -14,12 +14,16 @@ declare module 'express-session' {
 }
 
 const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
-export const SESSION_COOKIE = 'dawnpeg.session';
+
+/** Behind https the name itself makes browsers refuse a cookie that another host of the domain has set. */
+export function sessionCookieName(secure: boolean): string {
+  return `${secure ? '__Host-' : ''}dawnpeg.session`;
+}
 
 /** Sessions in the database behind a cookie that scripts cannot read. */
 export function sessions({ dataSource, config, clock }: AppContext): RequestHandler {
   return session({
-    name: SESSION_COOKIE,
+    name: sessionCookieName(config.secureCookies),
     secret: config.sessionSecret,
     store: new SessionStore(dataSource, clock),
     resave: false,

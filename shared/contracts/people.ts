@@ -12,7 +12,7 @@ export const roles = z
   .refine((list) => new Set(list).size === list.length, 'no-duplicates');
 
 export const EMAIL_MAX = 190;
-export const PASSWORD_MIN = 10;
+export const PASSWORD_MIN = 12;
 export const PASSWORD_MAX = 200;
 
 export const email = z

@@ -133,7 +133,7 @@ describe('PUT /api/session/password', () => {
       field: 'currentPassword',
       code: 'wrong-current-password',
     });
-    const short = await client.put('/api/session/password', { ...change, newPassword: 'short' });
+    const short = await client.put('/api/session/password', { ...change, newPassword: 'eleven sign' });
     expect((short.body as Problem).errors?.[0]).toMatchObject({
       field: 'newPassword',
       code: 'password-too-short',

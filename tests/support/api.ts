@@ -60,7 +60,14 @@ export async function openTestApi({
   mailer = null,
   scan = null,
   log = pino({ level: 'silent' }),
-}: { mailer?: Mailer | null; scan?: FileScan | null; log?: Logger } = {}): Promise<TestApi> {
+  settings = {},
+}: {
+  mailer?: Mailer | null;
+  scan?: FileScan | null;
+  log?: Logger;
+  /** Of the environment, besides what every test has. */
+  settings?: Record<string, string>;
+} = {}): Promise<TestApi> {
   const dataSource = await openTestDatabase();
   let now = TEST_NOW;
   const clock = {
@@ -77,6 +84,7 @@ export async function openTestApi({
     DATA_DIR: dataDir,
     DB_PASSWORD: 'unused here',
     SESSION_SECRET: 'only for tests, never for a village',
+    ...settings,
   });
   const build = () =>
     createApp({
