@@ -40,7 +40,7 @@ describe('npm start', () => {
       const started = start();
       await started.ready;
       expect(started.output()).toContain(`Dawnpeg is ready at http://127.0.0.1:${ports.product}`);
-      expect(started.output()).toContain('officer@dawnpeg.example');
+      expect(started.output()).toMatch(/NAME@dawnpeg\.example.*\n +Upper Tazimel: officer,/u);
       const health = await fetch(`http://127.0.0.1:${ports.product}/api/health`);
       expect(health.status).toBe(200);
       expect(statSync(path.join(dataDir, 'secrets.json')).mode & 0o777).toBe(0o600);

@@ -139,7 +139,11 @@ async function saveWithFirstSign(page: Page, way: Way, sign: RegExp, title: stri
     page.getByRole('heading', { name: 'Which calendar shall go by it?' }),
   );
   const name = page.getByLabel(/^Name of the work or rite/);
-  await way.tap(page.getByRole('button', { name: 'Begin 2027' }), name);
+  // Into the calendar whose draft is open; where it is in review, into the next one.
+  const into = page
+    .getByRole('link', { name: /^Put it into the calendar of 2027/ })
+    .or(page.getByRole('button', { name: 'Begin 2028' }));
+  await way.tap(into.first(), name);
   await way.tap(name);
   await name.fill(title);
   await way.tap(page.getByRole('button', { name: 'Save the entry' }), page.getByText(`Saved: ${title}.`));

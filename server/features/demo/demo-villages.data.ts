@@ -109,6 +109,7 @@ export const VARDESCA_TERRACES: DemoVillage = {
     { mailbox: 'elder-b1', displayName: 'Elder B-1', roles: ['elder'], account: true },
     { mailbox: 'elder-b2', displayName: 'Elder B-2', roles: ['elder'], account: true },
     { mailbox: 'elder-b3', displayName: 'Elder B-3', roles: ['elder'], account: false },
+    { mailbox: 'observer2', displayName: 'Pesra', roles: ['observer'], account: true },
   ],
   place: {
     name: 'Painted reservoir',
@@ -192,6 +193,7 @@ export const THOLMERE_LANDING: DemoVillage = {
     { mailbox: 'elder-c1', displayName: 'Elder C-1', roles: ['elder'], account: true },
     { mailbox: 'elder-c2', displayName: 'Elder C-2', roles: ['elder'], account: true },
     { mailbox: 'elder-c3', displayName: 'Elder C-3', roles: ['elder'], account: true },
+    { mailbox: 'observer3', displayName: 'Ivik', roles: ['observer'], account: true },
   ],
   place: {
     name: 'Landing stage',

@@ -9,6 +9,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Clock } from '../../http/context.js';
 import { hashPassword } from '../session/passwords.service.js';
 import { seedDemoCalendar } from './demo-calendar.service.js';
+import { seedNeighbourCalendars } from './demo-neighbours.service.js';
 import {
   DEMO_DOMAIN,
   DEMO_PASSWORD,
@@ -22,6 +23,7 @@ import {
 export async function seedDemo(dataSource: DataSource, clock: Clock): Promise<void> {
   await seedDemoVillages(dataSource, clock);
   await seedDemoCalendar(dataSource, clock);
+  await seedNeighbourCalendars(dataSource, clock);
 }
 
 /** People, settings, places and figures only. */
