@@ -247,7 +247,7 @@ export function createApp(options: AppOptions): App {
   privacyRoutes(
     mount,
     new OwnDataService(dataSource, clock, operator),
-    new LeavingService(dataSource, clock, withdrawals),
+    new LeavingService(dataSource, clock, withdrawals, cardSignIn),
   );
   sharingRoutes(mount, new GroupsService(dataSource, clock), new ItemSharingService(dataSource, clock));
   consentsRoutes(mount, consents, new ConsentCardService(dataSource, consents));

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { pin } from './cards.js';
 import { instant } from './common.js';
 import { anybody, defineEndpoint, signedIn } from './endpoint.js';
 import { PASSWORD_MAX } from './people.js';
@@ -35,7 +36,9 @@ export const ownData = z.strictObject({
 export type OwnData = z.infer<typeof ownData>;
 
 export const leavingInput = z.strictObject({
-  password: z.string().min(1, 'required').max(PASSWORD_MAX, 'too-long'),
+  /** Proves who leaves; a session that a card opened is proved by the card's PIN instead. */
+  password: z.string().min(1, 'required').max(PASSWORD_MAX, 'too-long').optional(),
+  pin: pin.optional(),
   /** Whether everything that the person gave goes with them; otherwise it stays, without their name. */
   takeBackGiven: z.boolean(),
 });

@@ -1,6 +1,8 @@
+import { randomUUID } from 'node:crypto';
 import { addDays, addMinutes } from 'date-fns';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { MembershipEntity } from '#server/db/entities/membership.entity.js';
+import { PersonEntity } from '#server/db/entities/person.entity.js';
 import { SessionEntity } from '#server/db/entities/session.entity.js';
 import { SignInCardEntity } from '#server/db/entities/sign-in-card.entity.js';
 import type { AuditEvent } from '#shared/contracts/audit.js';
@@ -301,5 +303,49 @@ describe('the printed card', () => {
     }
     const wrong = { code: 'AAABBBCCCDDDEEEFFF', name: '', size: 'a7' };
     await steward.post(path, wrong).expect(422);
+  });
+});
+
+describe('whoever has only a card', () => {
+  const leave = (client: Client, proof: object) =>
+    client.post('/api/privacy/leaving', { takeBackGiven: false, ...proof });
+  const asCardHolder = async () => {
+    const observer = await api.signIn('observer');
+    await api.dataSource.getRepository(PersonEntity).update(observer.personId, { passwordHash: null });
+    const code = await makeCard(observer.personId);
+    const client = await api.visitor();
+    await client.post('/api/session/card/pin', { code, pin: PIN }).expect(200);
+    return { code, client, personId: observer.personId };
+  };
+
+  it('takes along what is kept about them', async () => {
+    const { client, personId } = await asCardHolder();
+    const { text } = await client.get('/api/privacy/own-data').expect(200);
+    expect(text).toContain(personId);
+  });
+
+  it('leaves for good with the PIN, never with a wrong one or none, and the card opens nothing afterwards', async () => {
+    const { code, client, personId } = await asCardHolder();
+    expect((await leave(client, {}).expect(422)).body).toMatchObject({ errors: [{ field: 'pin' }] });
+    expect((await leave(client, { password: PIN }).expect(422)).body).toMatchObject({
+      errors: [{ field: 'pin' }],
+    });
+    expect((await leave(client, { pin: '9025' }).expect(422)).body).toMatchObject({
+      errors: [{ field: 'pin', code: 'pin-wrong' }],
+    });
+    await leave(client, { pin: PIN }).expect(204);
+    expect(await api.dataSource.getRepository(MembershipEntity).countBy({ personId })).toBe(0);
+    await client.get('/api/communities').expect(401);
+    expect((await tryPin(code, PIN))[0]).toBeGreaterThanOrEqual(400);
+  });
+
+  it('does not end their place in a village that the card does not open', async () => {
+    const { client, personId } = await asCardHolder();
+    const { communityId } = await api.signIn('officer2');
+    await api.dataSource
+      .getRepository(MembershipEntity)
+      .insert({ id: randomUUID(), personId, communityId, roles: ['observer'] });
+    const answer = await leave(client, { pin: PIN }).expect(403);
+    expect(answer.body).toMatchObject({ reason: 'needs-password' });
   });
 });

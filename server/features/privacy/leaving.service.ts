@@ -12,9 +12,10 @@ import { PersonEntity } from '../../db/entities/person.entity.js';
 import { SignInCardEntity } from '../../db/entities/sign-in-card.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Person } from '../../http/actor.js';
-import { conflict, invalidField } from '../../http/app-error.js';
+import { AppError, conflict, invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
+import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import { endSessionsOf } from '../session/end-sessions.service.js';
 import { passwordMatches } from '../session/passwords.service.js';
 import type { WithdrawalsService } from '../withdrawals/withdrawals.service.js';
@@ -25,19 +26,38 @@ export class LeavingService {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly withdrawals: WithdrawalsService,
+    private readonly pins: Pick<CardSignInService, 'provePin'>,
   ) {}
 
-  async leave(person: Person, { password, takeBackGiven }: LeavingInput): Promise<void> {
+  async leave(person: Person, { takeBackGiven, ...proof }: LeavingInput): Promise<void> {
     const { manager } = this.dataSource;
-    const known = await manager.findOneByOrFail(PersonEntity, { id: person.id });
-    if (!(await passwordMatches(known.passwordHash, password))) {
-      throw invalidField('password', 'wrong-current-password');
-    }
+    await this.expectProof(manager, person, proof);
     await this.expectFree(manager, person);
     if (takeBackGiven) await this.takeBackAll(manager, person);
     await inTransaction(this.dataSource, async (transaction) => {
       await this.erase(transaction, person);
     });
+  }
+
+  /** By the password; for whoever has only a card, by its PIN. A card of one village ends no place in another one. */
+  private async expectProof(
+    manager: EntityManager,
+    { id, byCardIn }: Person,
+    { password, pin }: Pick<LeavingInput, 'password' | 'pin'>,
+  ): Promise<void> {
+    if (byCardIn === undefined) {
+      if (password === undefined) throw invalidField('password', 'required');
+      const { passwordHash } = await manager.findOneByOrFail(PersonEntity, { id });
+      if (!(await passwordMatches(passwordHash, password))) {
+        throw invalidField('password', 'wrong-current-password');
+      }
+      return;
+    }
+    if (await manager.existsBy(MembershipEntity, { personId: id, communityId: Not(byCardIn) })) {
+      throw new AppError('not-allowed', { reason: 'needs-password' });
+    }
+    if (pin === undefined) throw invalidField('pin', 'required');
+    await this.pins.provePin(byCardIn, id, pin);
   }
 
   /** No village is left without a steward, nor its rule without the elder it names. */

@@ -79,6 +79,7 @@ export const texts = {
     goes: { name: 'It goes with me', note: 'Everything you gave is taken back for good, without a trace.' },
   },
   password: 'Your password',
+  pin: 'The PIN of your card',
   tick: 'I know that this cannot be undone.',
   tickFirst: 'Tick the line above first.',
   yes: 'Yes, leave for good',

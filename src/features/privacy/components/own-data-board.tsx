@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { useSession } from '#src/lib/session.js';
 import { SureButton } from '#src/lib/sure-button.js';
 import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
@@ -34,7 +35,8 @@ function Leave() {
   const { t } = useTranslation('privacy');
   const words = useProblemWords();
   const leave = useLeave();
-  const [password, setPassword] = useState('');
+  const byCard = useSession().card !== null;
+  const [secret, setSecret] = useState('');
   const [takeBackGiven, setTakeBackGiven] = useState(false);
   const code = leave.error instanceof ApiProblem ? leave.error.errors[0]?.code : undefined;
   return (
@@ -60,13 +62,14 @@ function Leave() {
             }))}
           />
           <TextField
-            label={t('password')}
+            label={t(byCard ? 'pin' : 'password')}
             type="password"
-            autoComplete="current-password"
-            value={password}
+            inputMode={byCard ? 'numeric' : undefined}
+            autoComplete={byCard ? 'off' : 'current-password'}
+            value={secret}
             problem={code === undefined ? undefined : words.field(code)}
             onChange={(event) => {
-              setPassword(event.currentTarget.value);
+              setSecret(event.currentTarget.value);
             }}
           />
         </div>
@@ -74,7 +77,7 @@ function Leave() {
       yes={t('yes')}
       tick={{ label: t('tick'), reason: t('tickFirst') }}
       act={async () => {
-        await leave.mutateAsync({ password, takeBackGiven });
+        await leave.mutateAsync({ ...(byCard ? { pin: secret } : { password: secret }), takeBackGiven });
       }}
     />
   );
