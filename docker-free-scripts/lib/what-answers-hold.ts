@@ -143,6 +143,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listCommunities: 'names villages',
   readCommunity: 'is the village’s settings',
   listPeople: 'names people',
+  readAfterDeath: 'is a day and numbers',
   listPlaces: 'is places and their skylines',
   readPlace: 'is one place and its skyline',
   findTimeZone: 'is a name of a zone',

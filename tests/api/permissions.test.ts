@@ -170,7 +170,7 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     withdrawalId: village.withdrawalId,
     consentId: village.consentIds[role ?? 'officer'],
     itemType: 'entry',
-    itemId: village.entryId,
+    itemId: endpoint.id === 'removeSound' ? village.attachmentId : village.entryId,
     markerKey: 'pleiades',
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
