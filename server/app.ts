@@ -39,6 +39,8 @@ import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
 import { figuresRoutes } from './features/figures/figures.routes.js';
 import { FiguresService } from './features/figures/figures.service.js';
+import { helpingRoutes } from './features/helping/helping.routes.js';
+import { HelpingService } from './features/helping/helping.service.js';
 import { healthRoutes } from './features/health/health.routes.js';
 import { HealthService } from './features/health/health.service.js';
 import { notesRoutes } from './features/notes/notes.routes.js';
@@ -181,16 +183,22 @@ export function createApp(options: AppOptions): App {
   router.use('/api', sessions(options), passport.initialize() as never, passport.session() as never);
   router.use('/api', csrfProtection);
 
-  const mount = new Mount(router, dataSource, path.join(config.dataDir, WAITING_FILES));
+  const helping = new HelpingService(dataSource, clock, cardSignIn);
+  const mount = new Mount(router, dataSource, path.join(config.dataDir, WAITING_FILES), {
+    helpedIn: (request, helper) => helping.helped(request.session, helper),
+    provePin: (communityId, personId, pin) => cardSignIn.provePin(communityId, personId, pin),
+  });
   healthRoutes(mount, new HealthService(dataSource), productVersion);
-  sessionRoutes(router, mount, {
+  const stateOf = sessionRoutes(router, mount, {
     service: sessionService,
     cards: cardSignIn,
     devices: new DevicesService(dataSource, clock),
+    helping,
     passport,
     clock,
     cardMinutes: config.cardSessionMinutes,
   });
+  helpingRoutes(router, mount, helping, stateOf);
   const cards = new CardsService(dataSource, clock);
   cardsRoutes(mount, cards, new CardPrintService(cards, clock, config.publicUrl));
   peopleRoutes(mount, new PeopleService(dataSource, clock), new CommunitiesService(dataSource, clock));

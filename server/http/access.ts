@@ -1,4 +1,5 @@
 import type { Access } from '#shared/contracts/endpoint.js';
+import type { Role } from '#shared/contracts/people.js';
 import type { DataSource } from 'typeorm';
 import { AttachmentEntity } from '../db/entities/attachment.entity.js';
 import { CalendarEntity } from '../db/entities/calendar.entity.js';
@@ -18,6 +19,8 @@ export async function admit(
   access: MemberAccess,
   person: Person,
   params: Readonly<Record<string, string>>,
+  /** Roles that count, where not all of the person's do. */
+  only: readonly Role[] | null = null,
 ): Promise<Actor> {
   const found = await communityOf(dataSource, access.scope, params);
   const communityId = person.byCardIn === undefined || person.byCardIn === found ? found : null;
@@ -28,11 +31,13 @@ export async function admit(
           .getRepository(MembershipEntity)
           .findOne({ where: { communityId, personId: person.id } });
   if (communityId === null || membership === null) throw notFound();
-  if (!access.roles.some((role) => membership.roles.includes(role))) throw new AppError('not-allowed');
-  return { person, communityId, roles: membership.roles };
+  const roles = membership.roles.filter((role) => only?.includes(role) ?? true);
+  if (!access.roles.some((role) => roles.includes(role))) throw new AppError('not-allowed');
+  return { person, communityId, roles };
 }
 
-async function communityOf(
+/** The community that a path belongs to; null where it names nothing. */
+export async function communityOf(
   dataSource: DataSource,
   scope: MemberAccess['scope'],
   params: Readonly<Record<string, string>>,

@@ -2,10 +2,10 @@ import type { Endpoint } from '#shared/contracts/endpoint.js';
 import type { Request, Response, Router } from 'express';
 import type { DataSource } from 'typeorm';
 import type { z } from 'zod';
-import { admit } from './access.js';
 import type { Actor, Person } from './actor.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
+import { actorFor, withHandOf, type HelpingRules } from './on-behalf.js';
 import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
 import { withUpload, type UploadedFile } from './upload.js';
 
@@ -41,6 +41,7 @@ export class Mount {
     private readonly dataSource: DataSource,
     /** Where files wait that come with a call, until it is answered. */
     private readonly waitingFolder: string,
+    private readonly helping: HelpingRules,
   ) {}
 
   forAnybody<E extends Endpoint>(endpoint: E, handler: Handler<E, Person | null>): void {
@@ -52,17 +53,19 @@ export class Mount {
     this.expect(endpoint, 'signed-in');
     this.add(endpoint, async (request, call) => {
       const person = signedIn(endpoint, request);
+      // What is a person's own is done by themself alone: nobody does it while they write for somebody else.
+      if (endpoint.method !== 'GET' && (await this.helping.helpedIn(request, person)) !== null) {
+        throw new AppError('not-allowed', { reason: 'not-while-helping' });
+      }
       return handler(call(), person);
     });
   }
 
   forMember<E extends Endpoint>(endpoint: E, handler: Handler<E, Actor>): void {
-    const { access } = endpoint;
-    if (access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
+    if (endpoint.access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
     this.add(endpoint, async (request, call) => {
-      const person = signedIn(endpoint, request);
-      const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
-      return handler(call(), actor);
+      const actor = await this.actor(endpoint, request);
+      return withHandOf(actor, () => handler(call(), actor));
     });
   }
 
@@ -71,10 +74,9 @@ export class Mount {
     const { access, upload } = endpoint;
     if (access.kind !== 'member' || upload === null) throw new TypeError(`${endpoint.id} takes no file`);
     this.add(endpoint, async (request, _call, response) => {
-      const person = signedIn(endpoint, request);
-      const actor = await admit(this.dataSource, access, person, idsOf(endpoint, request));
+      const actor = await this.actor(endpoint, request);
       return withUpload({ request, response, folder: this.waitingFolder, upload }, ({ meta, file }) =>
-        handler(parseInput(endpoint, request, meta), actor, file),
+        withHandOf(actor, () => handler(parseInput(endpoint, request, meta), actor, file)),
       );
     });
   }
@@ -82,6 +84,11 @@ export class Mount {
   /** Waits for the calls that have begun, also where whoever called has hung up. */
   async settled(): Promise<void> {
     await Promise.allSettled(this.underway);
+  }
+
+  private actor(endpoint: Endpoint, request: Request): Promise<Actor> {
+    const person = signedIn(endpoint, request);
+    return actorFor(this.dataSource, this.helping, endpoint, request, person, idsOf(endpoint, request));
   }
 
   private expect(endpoint: Endpoint, kind: Endpoint['access']['kind']): void {

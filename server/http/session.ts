@@ -1,6 +1,6 @@
 import session from 'express-session';
 import type { RequestHandler } from 'express';
-import type { SessionCard, SessionDevice } from '../db/entities/session.entity.js';
+import type { SessionCard, SessionDevice, SessionHelping } from '../db/entities/session.entity.js';
 import type { AppContext } from './context.js';
 import { SessionStore } from './session-store.js';
 
@@ -10,6 +10,7 @@ declare module 'express-session' {
     device?: SessionDevice;
     /** The card that opened it, and the one village that it opens. */
     card?: SessionCard;
+    helping?: SessionHelping;
   }
 }
 

@@ -12,6 +12,8 @@ export const AUDIT_ACTIONS = [
   'death-undone',
   'password-set',
   'devices-signed-out',
+  'helping-began',
+  'helping-ended',
   'card-made',
   'card-ended',
   'card-first-used',
@@ -75,6 +77,8 @@ export const auditEvent = z.strictObject({
   id,
   at: instant,
   actorName: z.string(),
+  /** For whom it was done, where somebody wrote for somebody else. */
+  onBehalfOfName: z.string().optional(),
   action: z.enum(AUDIT_ACTIONS),
   /** Names looked up now from the ids that the row keeps; null where the thing is gone. */
   subjectName: z.string().nullable(),

@@ -10,6 +10,7 @@ import { driftEndpoints } from './drift.js';
 import { finderEndpoints } from './finder.js';
 import { figuresEndpoints } from './figures.js';
 import { healthEndpoints } from './health.js';
+import { helpingEndpoints } from './helping.js';
 import { lookEndpoints } from './look.js';
 import { moonsEndpoints } from './moons.js';
 import { lettersEndpoints } from './letters.js';
@@ -34,6 +35,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   sessionEndpoints,
   privacyEndpoints,
   cardsEndpoints,
+  helpingEndpoints,
   lettersEndpoints,
   afterDeathEndpoints,
   peopleEndpoints,

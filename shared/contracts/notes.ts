@@ -82,6 +82,8 @@ export type NoteAnswerInput = z.infer<typeof noteAnswerInput>;
 export const noteAnswer = z.strictObject({
   id,
   authorName: z.string(),
+  /** Whose hand wrote it down, where it was not its author's. */
+  typedByName: z.string().optional(),
   text: z.string(),
   writtenAt: instant,
   mine: z.boolean(),
@@ -99,6 +101,8 @@ export const note = subjectFields.extend({
   voices: z.number().int().min(0),
   level: sharingLevel,
   authorName: z.string(),
+  /** Whose hand wrote it down, where it was not its author's. */
+  typedByName: z.string().optional(),
   writtenAt: instant,
   /** Set while it is closed; whoever wrote it closes and opens it, and nobody else. */
   closedAt: instant.nullable(),

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { id, instant, line, listOf } from './common.js';
 import { anybody, defineEndpoint, signedIn } from './endpoint.js';
-import { membership, oneTimeCode, PASSWORD_MAX, PASSWORD_MIN, email } from './people.js';
+import { membership, oneTimeCode, role, PASSWORD_MAX, PASSWORD_MIN, email } from './people.js';
 
 export const sessionPerson = z.strictObject({ id, email: z.string(), displayName: z.string() });
 export type SessionPerson = z.infer<typeof sessionPerson>;
@@ -12,6 +12,19 @@ export const sessionState = z.strictObject({
   memberships: z.array(membership).nullable(),
   /** Set where a card opened the session: it ends by itself after so long without use. */
   card: z.strictObject({ leaveAfterMinutes: z.number().int() }).nullable(),
+  /** Set while this device writes for somebody else. */
+  helping: z
+    .strictObject({
+      communityId: id,
+      personId: id,
+      displayName: z.string(),
+      /** What the helped person is there, as far as a helper may be it for them. */
+      roles: z.array(role),
+      /** They typed their PIN: one sees what they see. */
+      shownPin: z.boolean(),
+      until: instant,
+    })
+    .optional(),
   csrfToken: z.string(),
 });
 export type SessionState = z.infer<typeof sessionState>;

@@ -9,6 +9,7 @@ import { texts as drift } from './en/drift.js';
 import { texts as figures } from './en/figures.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
+import { texts as helping } from './en/helping.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
 import { texts as look } from './en/look.js';
@@ -38,6 +39,7 @@ export const en = {
   cards,
   session,
   files,
+  helping,
   letters,
   look,
   notes,

@@ -1,8 +1,10 @@
 import type { z } from 'zod';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
+import { ELDER_PIN_HEADER } from '#shared/contracts/on-behalf.js';
 import { sessionState } from '#shared/contracts/session.js';
 import { ApiProblem, readProblem } from './api-problem.js';
 import { csrfToken, keepCsrfToken } from './csrf.js';
+import { askElderPin } from './elder-pin.js';
 
 type Part<K extends string, S> = S extends z.ZodType ? Record<K, z.input<S>> : object;
 
@@ -55,11 +57,17 @@ export function apiUrl<E extends Endpoint>(
   return search === '' ? path : `${path}?${search}`;
 }
 
-async function send(endpoint: Endpoint, input: LooseInput, mayRenew: boolean): Promise<Response> {
+async function send(
+  endpoint: Endpoint,
+  input: LooseInput,
+  mayRenew: boolean,
+  elderPin: string | null = null,
+): Promise<Response> {
   const headers = new Headers({ Accept: 'application/json' });
   const init: RequestInit = { method: endpoint.method, headers, credentials: 'same-origin' };
   if (input.signal) init.signal = input.signal;
   if (endpoint.method !== 'GET') headers.set('X-CSRF-Token', csrfToken() ?? (await renewCsrfToken()));
+  if (elderPin !== null) headers.set(ELDER_PIN_HEADER, elderPin);
   if (endpoint.body !== undefined) {
     headers.set('Content-Type', 'application/json');
     init.body = JSON.stringify(input.body);
@@ -70,7 +78,12 @@ async function send(endpoint: Endpoint, input: LooseInput, mayRenew: boolean): P
   // A token dies with its session (signed out elsewhere, a restart): take the present one and try once more.
   if (problem.slug === 'csrf-token' && mayRenew) {
     await renewCsrfToken();
-    return send(endpoint, input, false);
+    return send(endpoint, input, false, elderPin);
+  }
+  // What a helped person agrees to is proved by them: they are asked here, whichever screen it is.
+  if (problem.reason === 'proof-needed' && elderPin === null) {
+    const pin = await askElderPin();
+    if (pin !== null) return send(endpoint, input, mayRenew, pin);
   }
   throw problem;
 }

@@ -70,10 +70,12 @@ export function useCurrentCommunity(): Membership {
 /** What the person may do in the village on screen. */
 export function useRoles(): { roles: readonly Role[]; is: (...any: Role[]) => boolean } {
   const { community } = useCommunityChoice();
+  const { helping } = useSession();
   return useMemo(() => {
-    const roles = community?.roles ?? [];
+    const isHelpedHere = helping?.shownPin === true && helping.communityId === community?.communityId;
+    const roles = isHelpedHere ? helping.roles : (community?.roles ?? []);
     return { roles, is: (...any: Role[]) => any.some((role) => roles.includes(role)) };
-  }, [community]);
+  }, [community, helping]);
 }
 
 /** The places of a village; several screens choose among them. */

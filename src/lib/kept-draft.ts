@@ -1,6 +1,6 @@
 import { useCallback, useEffect, useRef, useState } from 'react';
 import { forget, keep, readKept } from './device-storage.js';
-import { useSession } from './session.js';
+import { useActing, useSession } from './session.js';
 
 /** What was typed, when, and over which saved version of the row (null for something new). */
 export interface KeptDraft<T> {
@@ -31,7 +31,11 @@ export function draftPrefix(personId: string): string {
  * that an older release kept may have another shape and is then left alone.
  */
 export function useKeptDraft<T>(name: string, isFit: (value: unknown) => value is T): DraftKeeper<T> {
-  const personId = useSession().person?.id ?? 'visitor';
+  const { person } = useSession();
+  const acting = useActing();
+  // Below whoever signed in, so that it leaves the device with them.
+  const own = person?.id ?? 'visitor';
+  const personId = acting.id === '' || acting.id === own ? own : `${own}.${acting.id}`;
   const key = draftPrefix(personId) + name;
   const [found, setFound] = useState(() => ({ key, draft: readDraft(key, isFit) }));
   const [keptAt, setKeptAt] = useState<Date | null>(null);

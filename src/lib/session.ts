@@ -21,6 +21,18 @@ export function useSession(): SessionState {
   return useSuspenseQuery(sessionQuery).data;
 }
 
+/** Whose word is given on this device: the helped person's while somebody is helped, else one's own. */
+export function useActing(): { id: string; displayName: string } {
+  const { person, helping } = useSession();
+  if (helping !== undefined) return { id: helping.personId, displayName: helping.displayName };
+  return { id: person?.id ?? '', displayName: person?.displayName ?? '' };
+}
+
+/** What was read for one is not shown to another, nor for one who is helped to whoever helps. */
+function reader({ person, helping }: SessionState): string {
+  return [person?.id, helping?.personId, helping?.shownPin].join(' ');
+}
+
 /**
  * Takes over the answer of a session call. Whatever was read for another person is forgotten, except on a
  * change of password, where the person stays the same.
@@ -31,7 +43,7 @@ export function useTakeSession(): (state: SessionState) => void {
     (state: SessionState) => {
       keepCsrfToken(state.csrfToken);
       const before = client.getQueryData(sessionQuery.queryKey);
-      if (before?.person?.id !== state.person?.id) {
+      if (before === undefined || reader(before) !== reader(state)) {
         client.removeQueries({ predicate: (query) => query.queryKey[0] !== SESSION_KEY[0] });
       }
       client.setQueryData(sessionQuery.queryKey, state);

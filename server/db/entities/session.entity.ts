@@ -14,6 +14,15 @@ export interface SessionCard {
   communityId: string;
 }
 
+/** Whom this session helps, until when; within `data`, too. */
+export interface SessionHelping {
+  communityId: string;
+  personId: string;
+  /** The card whose PIN was shown; null where none was. */
+  cardId: string | null;
+  until: string;
+}
+
 /** A browser's session. The id is kept as a hash: a stolen table opens no session. */
 @Entity({ name: 'session' })
 export class SessionEntity {

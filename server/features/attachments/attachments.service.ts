@@ -152,6 +152,7 @@ export class AttachmentsService {
         widthPx: 'widthPx' in kept ? kept.widthPx : null,
         heightPx: 'heightPx' in kept ? kept.heightPx : null,
         addedBy: actor.person.id,
+        typedBy: actor.helper?.id ?? null,
         addedAt: this.clock.now(),
       };
       await manager.insert(AttachmentEntity, row);

@@ -32,7 +32,7 @@ export class AuditListService {
     const page = rows.slice(0, limit).filter((row) => appears(row) !== 'none');
     const actors = await personNames(
       manager,
-      page.map(({ actorId }) => actorId),
+      page.flatMap(({ actorId, onBehalfOf }) => [actorId, onBehalfOf]),
     );
     const subjects = await subjectNames(manager, page);
     return {
@@ -40,6 +40,7 @@ export class AuditListService {
         toAuditEvent(
           row,
           row.actorId === null ? '' : (actors.get(row.actorId) ?? ''),
+          row.onBehalfOf === null ? null : (actors.get(row.onBehalfOf) ?? ''),
           row.subjectId === null || appears(row) !== 'full' ? null : (subjects.get(row.subjectId) ?? null),
           appears(row) === 'blank',
         ),

@@ -4,6 +4,7 @@ import type { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
 export function toAuditEvent(
   row: AuditEventEntity,
   actorName: string,
+  onBehalfOfName: string | null,
   subjectName: string | null,
   isKept: boolean,
 ): AuditEvent {
@@ -11,6 +12,7 @@ export function toAuditEvent(
     id: row.id,
     at: row.at.toISOString(),
     actorName,
+    ...(onBehalfOfName === null ? {} : { onBehalfOfName }),
     action: row.action,
     subjectName,
     isKept,

@@ -2,6 +2,7 @@ import type { AuditAction } from '#shared/contracts/audit.js';
 import { randomUUID } from 'node:crypto';
 import type { EntityManager, QueryDeepPartialEntity } from 'typeorm';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
+import { handNow } from '../../http/on-behalf.js';
 
 export interface AuditRecord {
   at: Date;
@@ -18,12 +19,17 @@ export interface AuditRecord {
 
 /** Writes down what happened, in the same transaction as the change itself. */
 export async function recordAudit(manager: EntityManager, record: AuditRecord): Promise<void> {
-  const { details = {}, ...rest } = record;
+  const { details = {}, actorId, ...rest } = record;
+  const hand = handNow();
+  const isHelper = hand !== undefined && (actorId === hand.personId || actorId === hand.helperId);
+  const who = isHelper
+    ? { actorId: hand.helperId, onBehalfOf: rest.onBehalfOf ?? hand.personId }
+    : { actorId, onBehalfOf: rest.onBehalfOf ?? null };
   await manager
     .createQueryBuilder()
     .insert()
     .into(AuditEventEntity)
-    .values({ id: randomUUID(), ...rest, details } as QueryDeepPartialEntity<AuditEventEntity>)
+    .values({ id: randomUUID(), ...rest, ...who, details } as QueryDeepPartialEntity<AuditEventEntity>)
     .updateEntity(false)
     .execute();
 }

@@ -6,7 +6,7 @@ import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import type { Member, Viewer } from '../../policy/viewer.js';
-import { conflict, invalidField } from '../../http/app-error.js';
+import { AppError, conflict, invalidField } from '../../http/app-error.js';
 import { isOpen } from '../../policy/consents.js';
 import type { ConsentThing } from './consent-things.service.js';
 
@@ -71,6 +71,12 @@ export function withProof(
   }
   if (content.uses.length > 0 && proof === null) throw invalidField(`${prefix}proof`, 'proof-required');
   return content;
+}
+
+/** Whoever writes a yes down for the person they help brings that person's own: their PIN, or their voice. */
+export function expectElderProof({ helper }: Actor, { uses, proof }: ConsentContent): void {
+  if (helper === undefined || uses.length === 0 || helper.provedNow || proof?.kind === 'voice') return;
+  throw new AppError('not-allowed', { reason: 'proof-needed' });
 }
 
 /** Givers are of this village; a voice or a picture that proves a consent belongs to that consent. */

@@ -25,7 +25,15 @@ import { narrowNaming } from './agreed-naming.js';
 import { recordConsent, type ConsentAction } from './consent-audit.js';
 import { withClip } from './consent-clip.js';
 import { asksByName, consentName, withKeptName } from './consent-names.js';
-import { expectAnswerFollows, expectKnown, expectMayAsk, mayAsk, mayOf, withProof } from './consent-rules.js';
+import {
+  expectAnswerFollows,
+  expectElderProof,
+  expectKnown,
+  expectMayAsk,
+  mayAsk,
+  mayOf,
+  withProof,
+} from './consent-rules.js';
 import { consentThings, type ConsentThing, type ThingRef } from './consent-things.service.js';
 import { toColumns, toConsent, toConsentLine, type ConsentFacts } from './consents.mapper.js';
 
@@ -125,6 +133,7 @@ export class ConsentsService {
       if (thing === undefined || !thing.isSeen) throw notFound();
       expectMayAsk(actor, thing);
       const input = await withClip(manager, actor, id, written, attach);
+      expectElderProof(actor, input);
       const content = withProof(actor, input, thing, '');
       await expectKnown(manager, actor, content, id, '');
       const { giverId } = content;
@@ -134,7 +143,7 @@ export class ConsentsService {
       await manager.insert(ConsentEntity, {
         ...{ id, itemType, itemId, communityId: actor.communityId },
         ...toColumns(content, thing),
-        recordedBy: actor.person.id,
+        recordedBy: actor.helper?.id ?? actor.person.id,
         recordedAt: this.clock.now(),
       });
       const row = await manager.findOneByOrFail(ConsentEntity, { id });
@@ -160,6 +169,7 @@ export class ConsentsService {
         row.giverId === actor.person.id ? row : thing,
         'content.',
       );
+      expectElderProof(actor, content);
       expectAnswerFollows(row.state, content);
       await expectKnown(manager, actor, content, consentId, 'content.');
       await this.update(manager, row, { ...toColumns(content, thing), ...this.writer(actor) });
@@ -222,7 +232,7 @@ export class ConsentsService {
   }
 
   private writer(actor: Actor): Pick<ConsentEntity, 'recordedBy' | 'recordedAt'> {
-    return { recordedBy: actor.person.id, recordedAt: this.clock.now() };
+    return { recordedBy: actor.helper?.id ?? actor.person.id, recordedAt: this.clock.now() };
   }
 
   private async expectOfVillage(

@@ -32,15 +32,24 @@ export function toNote({ row, answers, shared, viewer, wordsStand, voices, names
     voices,
     level: shared.level,
     authorName: nameOf(row.authorId),
+    ...typed(row, names),
     writtenAt: row.writtenAt.toISOString(),
     closedAt: row.closedAt?.toISOString() ?? null,
     answers: answers.map((answer) => ({
       id: answer.id,
       authorName: nameOf(answer.authorId),
+        ...typed(answer, names),
       text: answer.text,
       writtenAt: answer.writtenAt.toISOString(),
       mine: answer.authorId === viewer.personId,
     })),
     mine: row.authorId === viewer.personId,
   };
+}
+
+function typed(
+  { typedBy }: { typedBy: string | null },
+  names: ReadonlyMap<string, string>,
+): { typedByName?: string } {
+  return typedBy === null ? {} : { typedByName: names.get(typedBy) ?? '' };
 }

@@ -71,6 +71,7 @@ export class NotesService {
         communityId,
         ...input,
         authorId: person.id,
+        typedBy: actor.helper?.id ?? null,
         writtenAt,
         closedAt: null,
       });
@@ -99,6 +100,7 @@ export class NotesService {
         noteId,
         text,
         authorId: actor.person.id,
+        typedBy: actor.helper?.id ?? null,
         writtenAt,
       });
       await this.record(manager, actor, 'note-answered', row);
@@ -185,8 +187,8 @@ export class NotesService {
     const viewer = await this.viewer(manager, actor);
     const newest = await this.newestTexts(manager, actor, rows);
     const names = await personNames(manager, [
-      ...seen.map(({ row }) => row.authorId),
-      ...answers.map(({ authorId }) => authorId),
+      ...seen.flatMap(({ row }) => [row.authorId, row.typedBy]),
+      ...answers.flatMap(({ authorId, typedBy }) => [authorId, typedBy]),
     ]);
     return seen.map(({ row, shared, voices }) =>
       toNote({

@@ -7,6 +7,7 @@ export function toSessionState(
   memberships: readonly MembershipEntity[],
   csrfToken: string,
   cardMinutes: number,
+  helping: SessionState['helping'] | null,
 ): SessionState {
   return {
     person: person && { id: person.id, email: person.email, displayName: person.displayName },
@@ -18,6 +19,7 @@ export function toSessionState(
         roles: membership.roles,
       })),
     card: person?.byCardIn === undefined ? null : { leaveAfterMinutes: cardMinutes },
+    ...(helping ? { helping } : {}),
     csrfToken,
   };
 }

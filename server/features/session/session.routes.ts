@@ -1,5 +1,5 @@
 import { cardsEndpoints } from '#shared/contracts/cards.js';
-import { sessionEndpoints } from '#shared/contracts/session.js';
+import { sessionEndpoints, type SessionState } from '#shared/contracts/session.js';
 import type { Request, RequestHandler, Router } from 'express';
 import type { Authenticator } from 'passport';
 import type { Person } from '../../http/actor.js';
@@ -11,6 +11,7 @@ import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import { sessionHash } from '../../http/session-store.js';
 import type { CardHolderIn, CardSignInService } from '../cards/card-sign-in.service.js';
+import type { HelpingService } from '../helping/helping.service.js';
 import { describeBrowser } from './describe-browser.js';
 import type { DevicesService } from './devices.service.js';
 import { toSessionState } from './session.mapper.js';
@@ -20,16 +21,29 @@ interface SessionParts {
   service: SessionService;
   cards: CardSignInService;
   devices: DevicesService;
+  helping: HelpingService;
   passport: Authenticator;
   clock: Clock;
   /** After so long without use a session that a card opened is over. */
   cardMinutes: number;
 }
 
-export function sessionRoutes(router: Router, mount: Mount, parts: SessionParts): void {
-  const { service, cards, devices, passport, clock, cardMinutes } = parts;
+/** @returns what a session call answers with, for the calls that stand elsewhere and change the session. */
+export function sessionRoutes(
+  router: Router,
+  mount: Mount,
+  parts: SessionParts,
+): (request: Request, person: Person | null) => Promise<SessionState> {
+  const { service, cards, devices, helping, passport, clock, cardMinutes } = parts;
   const stateOf = async (request: Request, person: Person | null) =>
-    toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request, true), cardMinutes);
+    toSessionState(
+      person,
+      await service.membershipsOf(person),
+      csrfTokenOf(request, true),
+      cardMinutes,
+      // A sign-in begins anew: nobody is helped yet.
+      null,
+    );
 
   // The limits stand before the routes that guess: signing in, codes, and the present password.
   const [perAddress, perAccount] = signInLimits() as [RequestHandler, RequestHandler];
@@ -103,9 +117,13 @@ export function sessionRoutes(router: Router, mount: Mount, parts: SessionParts)
     return undefined;
   });
 
+  return stateOfPresent;
+
   /** Reading keeps the token of the session: several tabs share one. */
   async function stateOfPresent(request: Request, person: Person | null) {
-    return toSessionState(person, await service.membershipsOf(person), csrfTokenOf(request), cardMinutes);
+    const memberships = await service.membershipsOf(person);
+    const helped = await helping.told(request.session, person);
+    return toSessionState(person, memberships, csrfTokenOf(request), cardMinutes, helped);
   }
 }
 

@@ -8,6 +8,7 @@ export const texts = {
   gone: 'something that is gone',
   somebody: 'Somebody',
   kept: 'something that its people keep',
+  onBehalf: '{{sentence}} Done for {{name}}.',
   sentence: {
     'person-added': '{{actor}} added {{subject}} as {{roles}}.',
     'roles-changed': '{{actor}} changed the roles of {{subject}} from {{before}} to {{after}}.',
@@ -17,6 +18,8 @@ export const texts = {
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',
     'devices-signed-out': '{{actor}} signed out on other devices.',
+    'helping-began': '{{actor}} began to type for {{subject}}.',
+    'helping-ended': '{{actor}} stopped typing for {{subject}}.',
     'card-made': '{{actor}} made a sign-in card for {{subject}}.',
     'card-ended': 'The sign-in card of {{subject}} ended: {{why}}.',
     'card-first-used': '{{subject}} used their sign-in card for the first time.',

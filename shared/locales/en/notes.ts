@@ -1,5 +1,6 @@
 /** English words of notes: remarks pinned to an entry, a figure or a marker. */
 export const texts = {
+  typedBy: 'Typed by {{typist}} for {{name}}',
   title: 'Notes',
   aboutEntry: 'Notes, voices, and who may see it',
   none: 'No open notes.',

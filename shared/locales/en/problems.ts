@@ -92,6 +92,11 @@ export const texts = {
     'consent-there': 'This person has been asked about it already. Write the new answer down there.',
     'nothing-to-withdraw': 'Nothing is agreed here that could be taken back.',
     'proof-needed': 'This needs the elder’s own yes: their PIN, or their voice. Nothing has been kept.',
+    'not-while-helping':
+      'This cannot be done while you type for somebody else. Press Done above, then do it for yourself.',
+    'pin-not-shown':
+      'For this, the person you help types their PIN. Press Done above, then begin with the PIN.',
+    'helping-over': 'The card was ended meanwhile. Begin again.',
     'no-proof-needed': 'You answer for yourself: no proof is needed for that.',
     'needs-password': 'A card is not enough for this. Sign in with your password.',
     'pin-wrong':

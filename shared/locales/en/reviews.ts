@@ -116,6 +116,20 @@ export const texts = {
     kept: 'What you wrote is kept on this device until you save it.',
   },
 
+  prove: {
+    title: '{{answer}}: {{name}} says so themselves',
+    sayAgree: '{{name}} says: “I agree.” It is kept as the proof, for those who see the answer.',
+    say: '{{name}} says: “{{answer}}.” It is kept as the proof, for those who see the answer.',
+    record: 'Record the voice',
+    stop: 'Stop',
+    listen: 'Listen to it',
+    keep: 'Keep the answer with this voice',
+    again: 'Record it again',
+    pin: 'Or {{name}} types their PIN',
+    byPin: 'Keep the answer with the PIN',
+    noMicrophone: 'The microphone cannot be used here. The PIN does as well.',
+  },
+
   forWhom: 'Who is answering',
   forSelf: 'I answer myself',
   forElder: 'I write down what an elder says',

@@ -3,7 +3,7 @@ import { useParams } from 'react-router-dom';
 import { VoiceRecorder } from '#src/features/attachments/components/voice-recorder.js';
 import { useKeptRecordings } from '#src/features/attachments/model/use-kept-recordings.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
-import { useSession } from '#src/lib/session.js';
+import { useActing } from '#src/lib/session.js';
 
 /** A voice about an entry of a version, for whoever answers by speaking. One that was begun here goes on. */
 export function SpeakAboutEntry({
@@ -17,7 +17,7 @@ export function SpeakAboutEntry({
 }) {
   const { calendarId = '' } = useParams();
   const { data: calendar } = useQuery(calendarQuery(calendarId));
-  const personId = useSession().person?.id ?? '';
+  const personId = useActing().id;
   const subject = { subjectType: 'entry', subjectId: entryId } as const;
   const { unsent, isKnown } = useKeptRecordings(personId, subject);
   if (calendar === undefined || !isKnown) return null;

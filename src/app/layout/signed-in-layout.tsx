@@ -18,9 +18,14 @@ import { useForgetWithdrawn } from './use-forget-withdrawn.js';
 /** Only whoever came in by a card fetches it. */
 const CardBar = lazy(async () => ({ default: (await import('./card-bar.js')).CardBar }));
 
+/** Only whoever helps somebody fetches it. */
+const HelpingBar = lazy(async () => ({
+  default: (await import('#src/features/helping/components/helping-bar.js')).HelpingBar,
+}));
+
 /** Asks a visitor to sign in first; brings everybody else to their screen, inside the rail. */
 export function SignedInLayout() {
-  const { person, card } = useSession();
+  const { person, card, helping } = useSession();
   const location = useLocation();
   const matches = useMatches();
   const { t } = useTranslation('common');
@@ -51,6 +56,11 @@ export function SignedInLayout() {
           {card !== null && (
             <Suspense fallback={null}>
               <CardBar />
+            </Suspense>
+          )}
+          {helping !== undefined && (
+            <Suspense fallback={null}>
+              <HelpingBar />
             </Suspense>
           )}
           <Outlet />

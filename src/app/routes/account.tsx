@@ -1,8 +1,16 @@
+import { HelpingBoard } from '#src/features/helping/components/helping-board.js';
 import { LetterChoiceBoard } from '#src/features/letters/components/letter-choice-board.js';
 import { OwnDataBoard } from '#src/features/privacy/components/own-data-board.js';
 import { AccountPage } from '#src/features/session/components/account-page.js';
 import { HiddenBoard } from '#src/features/withdrawals/components/hidden-board.js';
 
 export function Component() {
-  return <AccountPage letters={<LetterChoiceBoard />} hidden={<HiddenBoard />} ownData={<OwnDataBoard />} />;
+  return (
+    <AccountPage
+      helping={<HelpingBoard />}
+      letters={<LetterChoiceBoard />}
+      hidden={<HiddenBoard />}
+      ownData={<OwnDataBoard />}
+    />
+  );
 }

@@ -4,7 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { DEFAULT_SHARING } from '#shared/contracts/attachments.js';
 import { communityQuery } from '#src/lib/calendar-queries.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
-import { useSession } from '#src/lib/session.js';
+import { useActing } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import type { SharingOfAttachment } from '../model/kept-recordings.js';
@@ -26,7 +26,7 @@ export function AboutStep({
   const words = useProblemWords();
   const { data: community } = useQuery(communityQuery(communityId));
   const languages = community ? [community.villageLanguage, community.officerLanguage] : [];
-  const [speaker, setSpeaker] = useState(useSession().person?.displayName ?? '');
+  const [speaker, setSpeaker] = useState(useActing().displayName);
   const [language, setLanguage] = useState<string | null>(null);
   const [circle, setCircle] = useState<SharingOfAttachment>(
     fixed ?? {

@@ -3,7 +3,7 @@ import { useId, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { AttachmentSubject } from '#shared/contracts/attachments.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
-import { useSession } from '#src/lib/session.js';
+import { useActing } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { classNames } from '#src/ui/class-names.js';
 import { useKeptRecordings, type Unsent } from '../model/use-kept-recordings.js';
@@ -25,7 +25,7 @@ type Doing = { kind: 'record'; found: Unsent | null } | { kind: 'picture' } | nu
 export function AttachmentsPanel({ communityId, subject, look = 'board' }: AttachmentsPanelProps) {
   const { t } = useTranslation('attachments');
   const headingId = useId();
-  const personId = useSession().person?.id ?? '';
+  const personId = useActing().id;
   // Whoever sees drafts may add: officers, elders and stewards.
   const { seesDrafts: mayAdd } = useRolesIn(communityId);
   const [doing, setDoing] = useState<Doing>(null);

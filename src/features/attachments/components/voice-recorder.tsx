@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Attachment, AttachmentSubject } from '#shared/contracts/attachments.js';
-import { useSession } from '#src/lib/session.js';
+import { useActing } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import type { SharingOfAttachment } from '../model/kept-recordings.js';
@@ -35,7 +35,7 @@ const TITLES = {
 /** Who speaks – the agreement – record – stop – listen – keep. One step at a time. */
 export function VoiceRecorder({ communityId, subject, circle, found, onDone, onKept }: VoiceRecorderProps) {
   const { t } = useTranslation(['attachments', 'common']);
-  const personId = useSession().person?.id ?? '';
+  const personId = useActing().id;
   const recorder = useRecorder({ ...subject, communityId, personId, found });
   const { step, microphone } = recorder;
   const heading = useFocusOnStep(step);

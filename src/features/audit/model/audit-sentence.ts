@@ -13,7 +13,7 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
   const { details } = event;
   const list = (values: readonly string[]) => listWords(values, language);
   const roles = (value: unknown) => list(asRoles(value).map((role) => t(`common:role.${role}`)));
-  return t(`audit:sentence.${event.action}`, {
+  const sentence = t(`audit:sentence.${event.action}`, {
     actor: event.actorName === '' ? t('audit:somebody') : event.actorName,
     subject: event.subjectName ?? t(event.isKept ? 'audit:kept' : 'audit:gone'),
     level: isLevel(details['to']) ? t(`sharing:level.${details['to']}.name`) : '',
@@ -32,6 +32,8 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
     why: isCardEnd(details['why']) ? t(`audit:cardEnd.${details['why']}`) : '',
     answer: isAnswer(details['answer']) ? t(`audit:answer.${details['answer']}`) : '',
   });
+  const name = event.onBehalfOfName;
+  return name === undefined ? sentence : t('audit:onBehalf', { sentence, name: name || t('audit:somebody') });
 }
 
 function asText(value: unknown): string {

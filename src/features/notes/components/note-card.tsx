@@ -30,17 +30,13 @@ export function NoteCard({ thing, note, voices }: { thing: NotedThing; note: Not
         {note.level === 'elders' && <LevelChip level="elders" />}
       </p>
       {!note.wordsStand && <p className="text-small font-semibold">{t('wordsChanged')}</p>}
-      <Said
-        name={note.authorName}
-        at={note.writtenAt}
-        text={note.text || t(note.voices > 0 ? 'spoken' : 'toBeSpoken')}
-      />
+      <Said {...note} text={note.text || t(note.voices > 0 ? 'spoken' : 'toBeSpoken')} />
       {voices}
       {note.answers.length > 0 && (
         <ul aria-label={t('answers')} className="grid gap-2 border-s-2 border-hairline ps-3">
           {note.answers.map((answer) => (
             <li key={answer.id}>
-              <Said name={answer.authorName} at={answer.writtenAt} text={answer.text} />
+              <Said {...answer} />
             </li>
           ))}
         </ul>
@@ -83,14 +79,23 @@ function PinWords({ note: { pin } }: { note: Note }) {
   );
 }
 
-function Said({ name, at, text }: { name: string; at: string; text: string }) {
+function Said({
+  authorName,
+  typedByName,
+  writtenAt,
+  text,
+}: Pick<Note, 'authorName' | 'typedByName' | 'writtenAt' | 'text'>) {
+  const { t } = useTranslation('notes');
   const dates = useDateWords();
   const nameOf = useWriterWords();
   return (
     <>
       <p className="whitespace-pre-line break-words">{text}</p>
       <p className="text-small text-umber-soft">
-        {nameOf(name)} · {dates.moment(at)}
+        {typedByName === undefined
+          ? nameOf(authorName)
+          : t('typedBy', { name: nameOf(authorName), typist: typedByName })}{' '}
+        · {dates.moment(writtenAt)}
       </p>
     </>
   );

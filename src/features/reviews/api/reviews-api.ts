@@ -1,6 +1,7 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { reviewsEndpoints, type AnswerInput } from '#shared/contracts/reviews.js';
+import { reviewsEndpoints, type AnswerInput, type SpokenAnswerInput } from '#shared/contracts/reviews.js';
 import { callApi } from '#src/lib/api-client.js';
+import { uploadToApi } from '#src/lib/api-upload.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
 
 export interface VersionRef {
@@ -23,6 +24,19 @@ export function usePutAnswer(ref: VersionRef) {
   return useMutation({
     mutationFn: ({ entryId, ...body }: AnswerInput & { entryId: string }) =>
       callApi(reviewsEndpoints.putAnswer, { params: { ...paramsOf(ref), entryId }, body }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+/** With the elder's voice, which proves it. */
+export function usePutSpokenAnswer(ref: VersionRef) {
+  return useMutation({
+    mutationFn: ({ entryId, clip, ...body }: SpokenAnswerInput & { entryId: string; clip: Blob }) =>
+      uploadToApi(reviewsEndpoints.putSpokenAnswer, {
+        params: { ...paramsOf(ref), entryId },
+        body,
+        file: clip,
+      }),
     onSettled: useLookAgain(ref),
   });
 }

@@ -1,17 +1,21 @@
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { Answer, AnswerWord } from '#shared/contracts/reviews.js';
+import type { Answer, AnswerInput, AnswerWord } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
-import { useLetStand, usePutAnswer, useTakeBackAnswer } from '../api/reviews-api.js';
+import { useLetStand, usePutAnswer, usePutSpokenAnswer, useTakeBackAnswer } from '../api/reviews-api.js';
 import { AnswerButtons } from './answer-buttons.js';
 import type { Spokesman, SpokesmanProblem } from './for-whom.js';
+import { ProofPanel, type Proof } from './proof-panel.js';
 import { NotePanel, type Speak } from './note-panel.js';
 import { SpokenLine } from './answer-voice.js';
+
+type Unproved = Pick<AnswerInput, 'answer' | 'note' | 'recordingId'>;
 
 interface AnswerFootProps {
   version: Version;
@@ -40,7 +44,11 @@ export function AnswerFoot(props: AnswerFootProps) {
   const put = usePutAnswer(ref);
   const takeBack = useTakeBackAnswer(ref);
   const letStand = useLetStand(ref);
+  const putSpoken = usePutSpokenAnswer(ref);
+  const { helping } = useSession();
   const [noteFor, setNoteFor] = useState<AnswerWord | null>(null);
+  const [toProve, setToProve] = useState<Unproved | null>(null);
+  const [pinWords, setPinWords] = useState<string | undefined>(undefined);
 
   if (version.state !== 'in-review') {
     return (
@@ -64,6 +72,13 @@ export function AnswerFoot(props: AnswerFootProps) {
     recordingId: string | null = answer?.answer === chosen ? (answer.spoken?.attachmentId ?? null) : null,
   ): Promise<boolean> => {
     if (!ready()) return false;
+    const needsProof = helping !== undefined && (chosen === 'agree' || !helping.shownPin);
+    if (needsProof) {
+      setPinWords(undefined);
+      setToProve({ answer: chosen, note, recordingId });
+      // What was written stays on the device until it is proved.
+      return false;
+    }
     try {
       await put.mutateAsync({
         entryId,
@@ -80,10 +95,30 @@ export function AnswerFoot(props: AnswerFootProps) {
       else onMissing({ pin: words.field(pin) });
       return false;
     }
-    setNoteFor(null);
-    say(t('keptToast', { answer: t(`answer.${chosen}`) }), spokesman === null ? { onUndo: undo } : {});
-    onAnswered();
+    kept(chosen);
     return true;
+  };
+  const prove = async (word: Unproved, proof: Proof) => {
+    const body = { ...word, entryId, onBehalfOf: null };
+    try {
+      if ('pin' in proof) await put.mutateAsync({ ...body, witness: null, pin: proof.pin });
+      else await putSpoken.mutateAsync({ ...body, clip: proof.clip });
+    } catch (cause) {
+      const pin = pinProblem(cause);
+      if (pin === undefined) say(words.problem(cause));
+      else setPinWords(words.field(pin));
+      return;
+    }
+    setToProve(null);
+    kept(word.answer);
+  };
+  const kept = (chosen: AnswerWord) => {
+    setNoteFor(null);
+    say(
+      t('keptToast', { answer: t(`answer.${chosen}`) }),
+      spokesman === null && helping === undefined ? { onUndo: undo } : {},
+    );
+    onAnswered();
   };
   /** Undo brings the answer of before back, or none. */
   const undo = () => {
@@ -100,6 +135,22 @@ export function AnswerFoot(props: AnswerFootProps) {
     else if (ready()) setNoteFor(chosen);
   };
 
+  if (toProve !== null) {
+    return (
+      <div className="answer-foot">
+        <ProofPanel
+          name={helping?.displayName ?? ''}
+          answer={toProve.answer}
+          busy={put.isPending || putSpoken.isPending}
+          problem={pinWords}
+          onProof={(proof) => void prove(toProve, proof)}
+          onClose={() => {
+            setToProve(null);
+          }}
+        />
+      </div>
+    );
+  }
   if (noteFor !== null) {
     return (
       <div className="answer-foot">

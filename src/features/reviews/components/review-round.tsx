@@ -6,7 +6,7 @@ import type { Answer, ElderProgress } from '#shared/contracts/reviews.js';
 import type { Version, VersionEntry } from '#shared/contracts/versions.js';
 import { useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
-import { useSession } from '#src/lib/session.js';
+import { useActing, useSession } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { ProgressPegs } from '#src/ui/pegs.js';
 import { Page } from '#src/ui/page.js';
@@ -40,10 +40,11 @@ export function ReviewRound({
 }) {
   const { t } = useTranslation('reviews');
   const { is } = useRoles();
-  const me = useSession().person?.id ?? '';
+  const { helping } = useSession();
+  const me = useActing().id;
   const [spokesman, setSpokesman] = useState<Spokesman>({ elderId: '', witness: '', pin: '' });
   const [missing, setMissing] = useState<SpokesmanProblem>({});
-  const speaksForSelf = is('elder');
+  const speaksForSelf = is('elder') || helping !== undefined;
   const elderId = speaksForSelf ? me : spokesman.elderId;
   const elderName = answers.progress.find((each) => each.elderId === elderId)?.elderName ?? '';
 

@@ -18,6 +18,8 @@ import { ChangePasswordForm } from './change-password-form.js';
 import { DevicesBoard } from './devices-board.js';
 
 interface AccountPageProps {
+  /** Begin to type for somebody else. */
+  helping?: ReactNode;
   letters?: ReactNode;
   /** What the person may bring back. */
   hidden?: ReactNode;
@@ -26,7 +28,7 @@ interface AccountPageProps {
 }
 
 /** The person and their device: village on screen, look, password, sign out. */
-export function AccountPage({ letters, hidden, ownData }: AccountPageProps) {
+export function AccountPage({ helping, letters, hidden, ownData }: AccountPageProps) {
   const { t } = useTranslation(['session', 'common']);
   const { person, card } = useSession();
   const words = useProblemWords();
@@ -38,6 +40,7 @@ export function AccountPage({ letters, hidden, ownData }: AccountPageProps) {
       <Columns>
         <div className="grid gap-4">
           <VillageBoard />
+          {helping}
           {hidden}
           {letters}
           <Board title={t('account.screen')}>
