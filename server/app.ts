@@ -50,6 +50,7 @@ import { MoonsService } from './features/moons/moons.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
 import { OwnAnswersService } from './features/reviews/own-answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
+import { MeetingsService } from './features/reviews/meetings.service.js';
 import { SigningService } from './features/reviews/signing.service.js';
 import { LookCardService } from './features/look/look-card.service.js';
 import { LookSeasonService } from './features/look/look-season.service.js';
@@ -75,6 +76,7 @@ import { GroupsService } from './features/sharing/groups.service.js';
 import { ItemSharingService } from './features/sharing/item-sharing.service.js';
 import { sharingRoutes } from './features/sharing/sharing.routes.js';
 import { sheetsRoutes } from './features/sheets/sheets.routes.js';
+import { ReadBackService } from './features/sheets/read-back.service.js';
 import { SheetsService } from './features/sheets/sheets.service.js';
 import { SkyMarkerYearsService } from './features/sky-markers/sky-marker-years.service.js';
 import { skyMarkersRoutes } from './features/sky-markers/sky-markers.routes.js';
@@ -231,7 +233,9 @@ export function createApp(options: AppOptions): App {
   const proofs = new ProofsService(attachmentFiles, clock);
   const answers = new AnswersService(dataSource, clock, cardSignIn, proofs);
   const ownAnswers = new OwnAnswersService(dataSource, clock);
-  reviewsRoutes(mount, answers, ownAnswers, new SigningService(dataSource, clock, versions));
+  const meetings = new MeetingsService(dataSource, clock, proofs);
+  const signing = new SigningService(dataSource, clock, versions);
+  reviewsRoutes(mount, answers, ownAnswers, signing, meetings);
   const erasers = erasersOf(attachmentFiles, clock);
   const withdrawals = new WithdrawalsService(dataSource, clock, erasers, options.withdrawals);
   attachmentsRoutes(
@@ -240,7 +244,8 @@ export function createApp(options: AppOptions): App {
     new AttachmentReadingService(dataSource, clock, options.storage),
     new AttachmentWordsService(dataSource, clock),
   );
-  sheetsRoutes(mount, new SheetsService(contents, versions, clock));
+  const readBack = new ReadBackService(dataSource, contents, clock);
+  sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

@@ -11,6 +11,7 @@ import { finderEndpoints } from './finder.js';
 import { figuresEndpoints } from './figures.js';
 import { healthEndpoints } from './health.js';
 import { helpingEndpoints } from './helping.js';
+import { meetingsEndpoints } from './meetings.js';
 import { lookEndpoints } from './look.js';
 import { moonsEndpoints } from './moons.js';
 import { lettersEndpoints } from './letters.js';
@@ -51,6 +52,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   variantsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,
+  meetingsEndpoints,
   attachmentsEndpoints,
   sheetsEndpoints,
   sharingEndpoints,

@@ -25,7 +25,7 @@ export const doorRoutes: readonly AppRoute[] = [
 export const personRoutes: readonly AppRoute[] = [
   {
     path: PATTERNS.account,
-    texts: ['session', 'letters', 'withdrawals', 'privacy'],
+    texts: ['session', 'letters', 'withdrawals', 'privacy', 'helping'],
     load: () => import('./routes/account.js'),
   },
 ];
@@ -109,6 +109,7 @@ export const villageRoutes: readonly AppRoute[] = [
     load: () => import('./routes/review.js'),
     rail: false,
   },
+  { path: PATTERNS.meeting, texts: ['reviews'], load: () => import('./routes/meeting.js') },
   {
     path: PATTERNS.ownEntries,
     texts: ['reviews', 'sky', 'sharing'],

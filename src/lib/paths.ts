@@ -38,6 +38,7 @@ export const PATTERNS = {
   version: '/calendars/:calendarId/versions/:number',
   review: '/calendars/:calendarId/versions/:number/review',
   ownEntries: '/calendars/:calendarId/versions/:number/own',
+  meeting: '/calendars/:calendarId/versions/:number/meeting',
   compare: '/calendars/:calendarId/compare',
   sheet: '/calendars/:calendarId/sheet',
   takeBack: '/take-back/:communityId/:itemType/:itemId',
@@ -119,6 +120,7 @@ export const paths = {
     withQuery(calendarPath(calendarId), { ...query }),
   versions: (calendarId: string) => `${calendarPath(calendarId)}/versions`,
   version: (calendarId: string, number: VersionNumber) => versionPath(calendarId, number),
+  meeting: (calendarId: string, number: VersionNumber) => `${versionPath(calendarId, number)}/meeting`,
   review: (calendarId: string, number: VersionNumber, query: { entry?: string } = {}) =>
     withQuery(`${versionPath(calendarId, number)}/review`, query),
   /** What the person keeps with others of a submission. */

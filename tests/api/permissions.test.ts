@@ -149,6 +149,8 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     'listAnswers',
     'putAnswer',
     'putSpokenAnswer',
+    'typeInMeeting',
+    'printReadBack',
     'takeBackAnswer',
     'letDifferenceStand',
     'signVersion',
@@ -280,6 +282,11 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     putAnswer: () => (speaksForAnElder ? says({ onBehalfOf: village.elderId, witness: 'Tirel' }) : says()),
     putSpokenAnswer: () => ({ answer: 'agree', note: '', onBehalfOf: village.elderId }),
     putOwnAnswer: () => ({ answer: 'agree', note: '' }),
+    typeInMeeting: () => ({
+      heldOn: '2026-12-01',
+      witness: 'Tirel',
+      answers: [{ elderId: village.elderId, entryId: village.entryId, answer: 'agree', note: '' }],
+    }),
     signVersion: () => ({ role: role === 'steward' ? 'steward' : 'elder' }),
   };
   const make = bodies[endpoint.id];

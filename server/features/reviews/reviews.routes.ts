@@ -1,7 +1,9 @@
+import { meetingsEndpoints } from '#shared/contracts/meetings.js';
 import { reviewsEndpoints } from '#shared/contracts/reviews.js';
 import type { Mount } from '../../http/mount.js';
 import type { AnswersService } from './answers.service.js';
 import type { OwnAnswersService } from './own-answers.service.js';
+import type { MeetingsService } from './meetings.service.js';
 import type { SigningService } from './signing.service.js';
 
 export function reviewsRoutes(
@@ -9,7 +11,11 @@ export function reviewsRoutes(
   answers: AnswersService,
   own: OwnAnswersService,
   signing: SigningService,
+  meetings: MeetingsService,
 ): void {
+  mount.forMemberUpload(meetingsEndpoints.type, ({ params, body }, actor, file) =>
+    meetings.type(actor, params.calendarId, Number(params.number), body, file),
+  );
   mount.forMember(reviewsEndpoints.listAnswers, ({ params }, actor) =>
     answers.list(actor, params.calendarId, Number(params.number)),
   );

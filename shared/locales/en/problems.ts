@@ -176,6 +176,7 @@ export const texts = {
     'last-date-not-marked': 'Mark the entry as one with a last date, or take the date out.',
     'watch-or-last-date': 'A watch is never shortened: an entry is either a watch or has a last date.',
     'witness-required': 'Name the person who was there when the elder answered.',
+    'in-the-future': 'This day has not come yet.',
     'say-what-to-change': 'Say what should be different: write it, or speak it.',
     'not-your-recording':
       'This recording was not given by this elder about this entry, or it was taken away.',

@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { meetingsEndpoints, type MeetingInput } from '#shared/contracts/meetings.js';
 import { reviewsEndpoints, type AnswerInput, type SpokenAnswerInput } from '#shared/contracts/reviews.js';
 import { callApi } from '#src/lib/api-client.js';
 import { uploadToApi } from '#src/lib/api-upload.js';
@@ -37,6 +38,15 @@ export function usePutSpokenAnswer(ref: VersionRef) {
         body,
         file: clip,
       }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
+/** All of a paper's answers with its picture. */
+export function useTypeMeeting(ref: VersionRef) {
+  return useMutation({
+    mutationFn: ({ body, picture }: { body: MeetingInput; picture: Blob }) =>
+      uploadToApi(meetingsEndpoints.type, { params: paramsOf(ref), body, file: picture }),
     onSettled: useLookAgain(ref),
   });
 }

@@ -3,6 +3,8 @@ import { PenLine } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import type { ElderProgress } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
+import { meetingsEndpoints } from '#shared/contracts/meetings.js';
+import { apiUrl } from '#src/lib/api-client.js';
 import { useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -48,6 +50,19 @@ export function ReviewBoard({ version }: { version: Version }) {
                   {t('board.open')}
                 </ButtonLink>
               )}
+              {is('officer', 'steward') && (
+                <ButtonLink to={paths.meeting(version.calendarId, version.number)}>
+                  {t('meeting.open')}
+                </ButtonLink>
+              )}
+              <a
+                className="btn"
+                href={apiUrl(meetingsEndpoints.sheet, {
+                  params: { calendarId: version.calendarId, number: String(version.number) },
+                })}
+              >
+                {t('meeting.print')}
+              </a>
               {!is('elder') && is('officer', 'steward') && (
                 <ButtonLink to={paths.review(version.calendarId, version.number)}>
                   {t('board.writeDown')}

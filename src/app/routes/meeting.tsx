@@ -1,0 +1,1 @@
+export { MeetingPage as Component } from '#src/features/reviews/components/meeting-page.js';
