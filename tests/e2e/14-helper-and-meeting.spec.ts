@@ -3,14 +3,7 @@ import type { Version } from '#shared/contracts/versions.js';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
 import { plainPicture } from '#tests/support/media.js';
-import {
-  ask,
-  closeReview,
-  giveCard,
-  JOURNEY_PIN,
-  openReview,
-  reviewPath,
-} from '#tests/support/open-review.js';
+import { ask, giveCard, JOURNEY_PIN, openReview, reviewPath } from '#tests/support/open-review.js';
 
 /*
  * A grand-daughter who only reads types for an elder who shows the PIN; then an officer types in what the elders of a
@@ -26,13 +19,6 @@ test.beforeAll(async ({ browser }) => {
   await openReview(page, 1);
   await page.close();
 });
-test.afterAll(async ({ browser }) => {
-  const page = await browser.newPage();
-  await signIn(page, 'officer');
-  await closeReview(page, 1);
-  await page.close();
-});
-
 test('an observer types for an elder: the bar says so on every screen, and "agree" is the elder’s own', async ({
   page,
   browser,

@@ -24,8 +24,8 @@ export async function ask(
 }
 
 /**
- * A submission in review with entries that nobody has answered, copied from the draft's first one. Signed in as the
- * officer. What stood before is back after `closeReview` with the same count.
+ * A submission in review with entries that nobody has answered, copied from the draft's first one. For the officer's
+ * page; the villages are the journey's own.
  */
 export async function openReview(page: Page, copies: number): Promise<string> {
   const path = await reviewPath(page);
@@ -39,16 +39,6 @@ export async function openReview(page: Page, copies: number): Promise<string> {
   }
   await ask(page, 'post', `${calendarPath}/versions`);
   return reviewPath(page);
-}
-
-export async function closeReview(page: Page, copies: number): Promise<void> {
-  const path = await reviewPath(page);
-  const calendarPath = path.replace(/\/versions.*/u, '');
-  await ask(page, 'post', `${path}/changes-asked`, { reason: 'taken-back', note: '' });
-  for (let copy = 0; copy < copies; copy += 1) {
-    const list = (await (await page.request.get(`/api${calendarPath}/entries`)).json()) as EntryList;
-    await ask(page, 'delete', `${calendarPath}/entries/${list.items[1]?.id ?? ''}`);
-  }
 }
 
 export const JOURNEY_PIN = '4711';

@@ -35,9 +35,7 @@ export class MeetingsService {
     picture: IncomingFile,
   ): Promise<TypedMeeting> {
     // What cannot be written is refused before a picture is kept.
-    await this.inReview(calendarId, number, (manager, version) =>
-      this.look(manager, actor, version, input),
-    );
+    await this.inReview(calendarId, number, (manager, version) => this.look(manager, actor, version, input));
     return this.proofs.keepWith('picture', picture, (attach) =>
       this.inReview(calendarId, number, async (manager, version) => {
         const { open, stood } = await this.look(manager, actor, version, input);
