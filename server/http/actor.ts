@@ -1,4 +1,5 @@
 import type { Role } from '#shared/contracts/people.js';
+import { AsyncLocalStorage } from 'node:async_hooks';
 
 /** Who asks. */
 export interface Person {
@@ -41,4 +42,29 @@ export function hasRole(actor: Pick<Actor, 'roles'>, ...roles: Role[]): boolean 
 /** Drafts and reviews are for those who compile, review and sign. */
 export function seesDrafts(actor: Pick<Actor, 'roles'>): boolean {
   return hasRole(actor, 'officer', 'elder', 'steward');
+}
+
+/** Somebody is being helped in this session, and still may be. */
+export interface Helped {
+  person: Person;
+  communityId: string;
+  /** What they are there and a helper may be for them; never steward, officer or staff. */
+  roles: readonly Role[];
+  shownPin: boolean;
+}
+
+/** Whose hand does what is being done now, for whom; the records ask it, so that no write can forget to say. */
+export interface HandNow {
+  helperId: string;
+  personId: string;
+}
+
+const hands = new AsyncLocalStorage<HandNow | undefined>();
+
+export function withHandOf<T>({ person, helper }: Actor, work: () => T): T {
+  return hands.run(helper === undefined ? undefined : { helperId: helper.id, personId: person.id }, work);
+}
+
+export function handNow(): HandNow | undefined {
+  return hands.getStore();
 }

@@ -2,10 +2,10 @@ import type { Endpoint } from '#shared/contracts/endpoint.js';
 import type { Request, Response, Router } from 'express';
 import type { DataSource } from 'typeorm';
 import type { z } from 'zod';
-import type { Actor, Person } from './actor.js';
+import { withHandOf, type Actor, type Person } from './actor.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
-import { actorFor, withHandOf, type HelpingRules } from './on-behalf.js';
+import { actorFor, type HelpingRules } from './on-behalf.js';
 import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
 import { withUpload, type UploadedFile } from './upload.js';
 

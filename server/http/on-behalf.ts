@@ -1,22 +1,11 @@
 import { ELDER_PIN_HEADER, ON_BEHALF } from '#shared/contracts/on-behalf.js';
 import type { Endpoint } from '#shared/contracts/endpoint.js';
 import { pin as pinShape } from '#shared/contracts/cards.js';
-import type { Role } from '#shared/contracts/people.js';
 import type { Request } from 'express';
-import { AsyncLocalStorage } from 'node:async_hooks';
 import type { DataSource } from 'typeorm';
 import { admit, communityOf } from './access.js';
-import { seesDrafts, type Actor, type Person } from './actor.js';
+import { seesDrafts, type Actor, type Helped, type Person } from './actor.js';
 import { AppError } from './app-error.js';
-
-/** Somebody is being helped in this session, and still may be. */
-export interface Helped {
-  person: Person;
-  communityId: string;
-  /** What they are there and a helper may be for them; never steward, officer or staff. */
-  roles: readonly Role[];
-  shownPin: boolean;
-}
 
 export interface HelpingRules {
   /** Null where this session helps nobody, or no longer. */
@@ -89,20 +78,4 @@ async function inTheNameOf(
 /** Helping opens no more than the helped person's card does. */
 function expectNoPasswordNeeded({ needsPassword }: Endpoint): void {
   if (needsPassword) throw new AppError('not-allowed', { reason: 'needs-password' });
-}
-
-/** Whose hand does what is being done now, for whom; the records ask it, so that no write can forget to say. */
-export interface HandNow {
-  helperId: string;
-  personId: string;
-}
-
-const hands = new AsyncLocalStorage<HandNow | undefined>();
-
-export function withHandOf<T>({ person, helper }: Actor, work: () => T): T {
-  return hands.run(helper === undefined ? undefined : { helperId: helper.id, personId: person.id }, work);
-}
-
-export function handNow(): HandNow | undefined {
-  return hands.getStore();
 }

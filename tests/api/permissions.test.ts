@@ -268,8 +268,8 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     noteDeath: () => ({ diedOn: '2026-11-01', removesForGood: false }),
     pauseItem: () => ({ askedById: village.place.id }),
     removeSound: () => ({ askedById: village.place.id }),
-    // Somebody who is no elder: nobody begins to be helped in the middle of this.
-    startHelping: () => ({ personId: village.place.id, pin: null }),
+    // Without a card there is no PIN: nobody begins to be helped in the middle of this.
+    startHelping: () => ({ personId: village.elderId, pin: '9025' }),
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
     changeConsent: () => ({ content: asked(), ...stale }),
     withdrawConsent: () => stale,

@@ -2,7 +2,7 @@ import type { AuditAction } from '#shared/contracts/audit.js';
 import { randomUUID } from 'node:crypto';
 import type { EntityManager, QueryDeepPartialEntity } from 'typeorm';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
-import { handNow } from '../../http/on-behalf.js';
+import { handNow } from '../../http/actor.js';
 
 export interface AuditRecord {
   at: Date;

@@ -2,21 +2,22 @@ import { CARD_ROLES } from '#shared/contracts/cards.js';
 import { HELPING_MINUTES, type Helpable, type HelpingInput } from '#shared/contracts/helping.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { addMinutes } from 'date-fns';
-import type { SessionData } from 'express-session';
 import { In, IsNull, Not, type DataSource } from 'typeorm';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PersonEntity } from '../../db/entities/person.entity.js';
 import type { SessionHelping } from '../../db/entities/session.entity.js';
 import { SignInCardEntity } from '../../db/entities/sign-in-card.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import { seesDrafts, type Actor, type Person } from '../../http/actor.js';
+import { seesDrafts, type Actor, type Helped, type Person } from '../../http/actor.js';
 import { AppError, conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import type { Helped } from '../../http/on-behalf.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
 
-type Kept = Pick<SessionData, 'helping'>;
+/** What a session keeps of it. */
+interface Kept {
+  helping?: SessionHelping;
+}
 
 /** Somebody writes for an elder or observer, on this device, for half an hour. */
 export class HelpingService {

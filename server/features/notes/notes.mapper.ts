@@ -38,7 +38,7 @@ export function toNote({ row, answers, shared, viewer, wordsStand, voices, names
     answers: answers.map((answer) => ({
       id: answer.id,
       authorName: nameOf(answer.authorId),
-        ...typed(answer, names),
+      ...typed(answer, names),
       text: answer.text,
       writtenAt: answer.writtenAt.toISOString(),
       mine: answer.authorId === viewer.personId,

@@ -195,7 +195,6 @@ export const texts = {
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',
     'uses-need-yes': 'Ticks need a yes. Choose “Yes” above, or take the ticks out.',
     'words-not-there': 'These words do not stand in the text. Mark them in the text above.',
-    'in-the-future': 'This day has not come yet.',
     'before-asked': 'This day lies before the day of asking.',
     'answered-before': 'This was answered before. Write down a yes or a no.',
     'own-word-of-giver': 'Only the giver themself can say it here in their own word.',
