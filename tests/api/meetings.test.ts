@@ -131,8 +131,11 @@ describe('the sheet that is read to a meeting', () => {
       .responseType('blob')
       .expect(200)
       .expect('Content-Type', 'application/pdf');
-    const text = readPdfText(body as Buffer);
-    const pages = text.split('\f').filter((page) => page.trim() !== '');
+    const pages = readPdfText(body as Buffer)
+      .split('\f')
+      .map((page) => page.replace(/\s+/gu, ' '))
+      .filter((page) => page.trim() !== '');
+    const text = pages.join(' ');
     for (const { content } of version.entries) expect(text).toContain(content.titleOfficer);
     for (const words of ['Agree', 'Not mine to say', 'Elder A-1', 'Elder A-3', 'Best days:']) {
       expect(text).toContain(words);
