@@ -70,6 +70,8 @@ import { ItemStatesService } from './features/withdrawals/item-states.service.js
 import { WithdrawalsService } from './features/withdrawals/withdrawals.service.js';
 import { withdrawalsRoutes } from './features/withdrawals/withdrawals.routes.js';
 import type { WithdrawalList } from './storage/withdrawal-list.js';
+import { actualDaysRoutes } from './features/actual-days/actual-days.routes.js';
+import { ActualDaysService } from './features/actual-days/actual-days.service.js';
 import { variantsRoutes } from './features/variants/variants.routes.js';
 import { VariantsService } from './features/variants/variants.service.js';
 import { GroupsService } from './features/sharing/groups.service.js';
@@ -227,6 +229,7 @@ export function createApp(options: AppOptions): App {
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
   notesRoutes(mount, new NotesService(dataSource, clock));
+  actualDaysRoutes(mount, new ActualDaysService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);

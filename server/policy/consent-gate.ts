@@ -46,6 +46,6 @@ export async function recordingsMayBeOpened(
 }
 
 function markerKeyOf(lead: EntryLead): string | null {
-  if (lead.type === 'marker') return lead.markerKey;
+  if (lead.type === 'marker' || lead.type === 'marker-as-seen') return lead.markerKey;
   return lead.type === 'sky' && 'markerKey' in lead.spec ? lead.spec.markerKey : null;
 }

@@ -1,10 +1,21 @@
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
+import type { EventRecord } from '#shared/contracts/event-record.js';
 import type { Shared } from './policy.js';
 import type { Viewer } from './viewer.js';
 
 interface Given {
   giver: string;
   giverId?: string | null | undefined;
+  record?: EventRecord | undefined;
+}
+
+/** A content without its giver's name: also where the record says that the giver vouches for it. */
+export function withoutGiver<C extends Given>(content: C, giver = ''): C {
+  const { record } = content;
+  if (record === undefined || content.giver === '' || record.trust.by !== content.giver) {
+    return { ...content, giver };
+  }
+  return { ...content, giver, record: { ...record, trust: { ...record.trust, by: '' } } };
 }
 
 /** Is the giver's name kept from this person? Givers read their own; for all others their wish holds as it is today. */
@@ -28,8 +39,7 @@ export function anybody(viewer: Viewer): Viewer {
 export function withNaming<C extends Given>(viewer: Viewer, shared: Shared | undefined, content: C): C {
   if (shared === undefined || !hidesGiver(viewer, shared)) return content;
   return {
-    ...content,
-    giver: givenName(viewer, shared, content.giver),
+    ...withoutGiver(content, givenName(viewer, shared, content.giver)),
     ...(content.giverId === undefined ? {} : { giverId: null }),
   };
 }
@@ -44,5 +54,11 @@ export function withKeptGiver<C extends Given>(
   if (!hidesGiver(viewer, shared)) return written;
   const { giverId: _written, ...rest } = written;
   const kept = stored.giverId === undefined ? {} : { giverId: stored.giverId };
-  return { ...rest, giver: stored.giver, ...kept } as C;
+  return { ...rest, giver: stored.giver, ...kept, ...keptRecord(stored, written) } as C;
+}
+
+function keptRecord(stored: Given, { record }: Given): Pick<Given, 'record'> {
+  const hidden = stored.record?.trust.by;
+  if (record?.trust.by !== '' || hidden === undefined || hidden !== stored.giver) return {};
+  return { record: { ...record, trust: { ...record.trust, by: hidden } } };
 }

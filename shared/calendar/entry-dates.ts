@@ -14,10 +14,20 @@ import type {
   StarOutcome,
 } from '#shared/sky/index.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
-import { dayNumberOf } from '#shared/kernel/iso-date.js';
-import type { EntryDates, EntryTiming, EntryWarning, LabelledDay, OccurrenceDays } from './entry-model.js';
+import { dayNumberFromIso, dayNumberOf, isoDateOf } from '#shared/kernel/iso-date.js';
+import type {
+  CountedDays,
+  EntryDates,
+  EntryLead,
+  EntryTiming,
+  EntryWarning,
+  LabelledDay,
+  MonthDay,
+  OccurrenceDays,
+  StarLead,
+} from './entry-model.js';
 import { ENTRY_WARNINGS } from './entry-model.js';
-import { windowOf } from './window.js';
+import { windowOf, type WindowResult } from './window.js';
 
 /** Remarks of the sky that an officer must know before tying work to a marker. */
 const WARNED_NOTES = ['weak-marker', 'never-disappears', 'lost-in-light-nights'] as const satisfies SkyNote[];
@@ -45,6 +55,20 @@ export interface SkyMarkerDays {
   occurrences: readonly OccurrenceDays[];
 }
 
+/** Days that lead, by number; the same one twice for a single day. */
+export interface DaySpell {
+  first: number;
+  last: number;
+}
+
+/** What an entry that is counted from another one is told about it. */
+export interface AnchorDays {
+  basis: 'planned' | 'actual' | 'waiting' | 'gone';
+  spell: DaySpell | null;
+  /** The planned day beside the actual one, or while that is not known. */
+  planned: DaySpell | null;
+}
+
 /**
  * What the sky and the rules make of one entry in one civil year. `leadYear` is the leading marker's year at the
  * calendar's place; it is not asked for where a fixed date leads. The answer rests on this entry alone, so the
@@ -67,17 +91,13 @@ export function entryDatesFromDays(
   timing: EntryTiming,
   year: number,
   leadDays: MarkerDays | SkyMarkerDays | null,
+  anchor: AnchorDays | null = null,
 ): EntryDates {
-  const lead = leadOf(timing, year, leadDays);
+  const lead = leadOf(timing, year, leadDays, anchor);
   const warnings = new Set(lead.warnings);
   let window: EntryDates['window'] = null;
-  if (lead.dayNumber !== null) {
-    const result = windowOf({
-      leadDayNumber: lead.dayNumber,
-      offsets: timing.offsets,
-      lastDate: timing.hasLastDate ? (timing.lastDate?.date ?? null) : null,
-      protectiveWatch: timing.protectiveWatch,
-    });
+  if (lead.spell !== null) {
+    const result = windowFrom(lead.spell, timing);
     window = result.window;
     if (result.lastDateEffect === 'closed') warnings.add('window-closed-by-last-date');
     if (result.lastDateEffect === 'shortened') warnings.add('window-shortened-by-last-date');
@@ -88,8 +108,28 @@ export function entryDatesFromDays(
     // Left out, not undefined: an entry that goes by a star must give the same text as before there were such signs.
     ...(lead.sky && { sky: lead.sky }),
     marker: lead.marker,
+    ...(lead.counted && { counted: countedDays(lead.counted, timing) }),
     window,
     warnings: inOrder(warnings),
+  };
+}
+
+function windowFrom({ first, last }: DaySpell, timing: EntryTiming): WindowResult {
+  return windowOf({
+    leadDayNumber: first,
+    leadLastDayNumber: last,
+    offsets: timing.offsets,
+    lastDate: timing.hasLastDate ? (timing.lastDate?.date ?? null) : null,
+    protectiveWatch: timing.protectiveWatch,
+  });
+}
+
+function countedDays({ basis, spell, beside }: Counted, timing: EntryTiming): CountedDays {
+  return {
+    basis,
+    from: spell && isoDateOf(spell.first),
+    to: spell && isoDateOf(spell.last),
+    beside: beside && windowFrom(beside, timing).window,
   };
 }
 
@@ -98,8 +138,15 @@ export function inOrder(warnings: ReadonlySet<EntryWarning>): EntryWarning[] {
   return ENTRY_WARNINGS.filter((warning) => warnings.has(warning));
 }
 
+interface Counted {
+  basis: CountedDays['basis'];
+  spell: DaySpell | null;
+  beside: DaySpell | null;
+}
+
 interface Lead {
-  dayNumber: number | null;
+  spell: DaySpell | null;
+  counted?: Counted;
   starOutcome: EntryDates['starOutcome'];
   phenomenonOutcome: EntryDates['phenomenonOutcome'];
   sky?: NonNullable<EntryDates['sky']>;
@@ -107,17 +154,73 @@ interface Lead {
   warnings: EntryWarning[];
 }
 
-function leadOf({ lead }: EntryTiming, year: number, leadDays: MarkerDays | SkyMarkerDays | null): Lead {
-  if (lead.type === 'fixed-date') {
-    return {
-      dayNumber: dayNumberOf(year, lead.date.month, lead.date.day),
-      starOutcome: null,
-      phenomenonOutcome: null,
-      marker: null,
-      warnings: [],
-    };
+type LeadDays = MarkerDays | SkyMarkerDays | null;
+
+function leadOf({ lead }: EntryTiming, year: number, leadDays: LeadDays, anchor: AnchorDays | null): Lead {
+  switch (lead.type) {
+    case 'fixed-date':
+      return withoutSky(oneDay(dayNumberOf(year, lead.date.month, lead.date.day)));
+    case 'sky':
+      return skyLeadOf(lead, year, leadDays);
+    case 'marker':
+      return starLeadOf(lead, year, leadDays);
+    case 'marker-as-seen':
+      return seenLeadOf(lead, year, leadDays);
+    case 'nature-sign': {
+      const spell = spellIn(year, lead.usual);
+      return { ...withoutSky(spell), counted: { basis: 'usual', spell, beside: null } };
+    }
+    case 'entry-planned':
+    case 'entry-actual':
+      return hungLeadOf(lead, anchor);
   }
-  if (lead.type === 'sky') return skyLeadOf(lead, year, leadDays);
+}
+
+/** Usual days of a year; they may begin before New Year and end after it. */
+function spellIn(year: number, { from, to }: { from: MonthDay; to: MonthDay }): DaySpell {
+  const first = dayNumberOf(year, from.month, from.day);
+  const last = dayNumberOf(year, to.month, to.day);
+  return { first, last: last < first ? dayNumberOf(year + 1, to.month, to.day) : last };
+}
+
+function oneDay(dayNumber: number): DaySpell {
+  return { first: dayNumber, last: dayNumber };
+}
+
+function withoutSky(spell: DaySpell | null, warnings: EntryWarning[] = []): Lead {
+  return { spell, starOutcome: null, phenomenonOutcome: null, marker: null, warnings };
+}
+
+/** The computed day stays beside; doubts about whether there is one are settled once somebody has seen it. */
+function seenLeadOf(
+  lead: Extract<EntryLead, { type: 'marker-as-seen' }>,
+  year: number,
+  leadDays: LeadDays,
+): Lead {
+  const computed = starLeadOf(lead, year, leadDays);
+  if (lead.seen === null) return computed;
+  const spell = oneDay(dayNumberFromIso(lead.seen.date));
+  const warnings = computed.warnings.filter((warning) =>
+    (WARNED_NOTES as readonly string[]).includes(warning),
+  );
+  return { ...computed, spell, warnings, counted: { basis: 'seen', spell, beside: computed.spell } };
+}
+
+function hungLeadOf(
+  lead: Extract<EntryLead, { type: 'entry-planned' | 'entry-actual' }>,
+  anchor: AnchorDays | null,
+): Lead {
+  if (anchor === null)
+    throw new RangeError(`The entry is counted from ${lead.entryId}; nothing was told of it.`);
+  const { basis, spell, planned } = anchor;
+  const warnings: EntryWarning[] = [];
+  if (basis === 'gone') warnings.push('anchor-gone');
+  else if (basis === 'waiting') warnings.push('waits-for-actual-day');
+  else if (spell === null) warnings.push('anchor-without-days');
+  return { ...withoutSky(spell, warnings), counted: { basis, spell, beside: planned } };
+}
+
+function starLeadOf(lead: StarLead, year: number, leadDays: LeadDays): Lead {
   const markerDays = leadDays && 'markerKey' in leadDays ? leadDays : null;
   if (markerDays?.markerKey !== lead.markerKey || markerDays.year !== year) {
     throw new RangeError(`The entry goes by ${lead.markerKey} in ${year}; another marker's year was given.`);
@@ -131,7 +234,7 @@ function leadOf({ lead }: EntryTiming, year: number, leadDays: MarkerDays | SkyM
   if (occurrence) {
     const notes = new Set<SkyNote>([...markerDays.notes, ...occurrence.notes]);
     return {
-      dayNumber: occurrence.expected.dayNumber,
+      spell: oneDay(occurrence.expected.dayNumber),
       starOutcome: markerDays.outcome,
       phenomenonOutcome: outcome,
       marker: { ...occurrence, notes: [...occurrence.notes] },
@@ -161,7 +264,7 @@ function skyLeadOf(
   if (occurrence) {
     const { expected, early, late, notes } = occurrence;
     return {
-      dayNumber: expected.dayNumber,
+      spell: oneDay(expected.dayNumber),
       starOutcome: null,
       phenomenonOutcome: null,
       sky,
@@ -184,7 +287,7 @@ function undated(
   phenomenonOutcome: EntryDates['phenomenonOutcome'],
   warning: EntryWarning,
 ): Lead {
-  return { dayNumber: null, starOutcome, phenomenonOutcome, marker: null, warnings: [warning] };
+  return { spell: null, starOutcome, phenomenonOutcome, marker: null, warnings: [warning] };
 }
 
 function markerDaysOf({ markerKey, year, outcome, notes, phenomena }: MarkerYear): MarkerDays {

@@ -22,7 +22,35 @@ export type EntryLead =
   | { type: 'marker'; markerKey: string; phenomenon: Phenomenon; occurrence: 1 | 2 }
   /** `occurrence` counts within the year: up to thirteen for Moons, two for the rest. */
   | { type: 'sky'; spec: SkyMarkerSpec; occurrence: number }
-  | { type: 'fixed-date'; date: MonthDay; source: string };
+  | { type: 'fixed-date'; date: MonthDay; source: string }
+  /** Counted from the computed day until people have seen it; from then on from the day on which they saw it. */
+  | {
+      type: 'marker-as-seen';
+      markerKey: string;
+      phenomenon: Phenomenon;
+      occurrence: 1 | 2;
+      seen: SeenDay | null;
+    }
+  /** Something that grows, flies or blows, with the days on which it usually comes. */
+  | { type: 'nature-sign'; name: string; usual: { from: MonthDay; to: MonthDay }; source: string }
+  | { type: 'entry-planned'; entryId: string; day: PlannedDay }
+  | { type: 'entry-actual'; entryId: string };
+
+export type PlannedDay = 'earliest' | 'bestFrom' | 'bestTo' | 'lastAdvised';
+
+export interface SeenDay {
+  date: IsoDate;
+  by: string;
+  /** The elder who says so, too. */
+  agreedBy: string;
+}
+
+export type StarLead = Extract<EntryLead, { type: 'marker' | 'marker-as-seen' }>;
+
+/** Does a star's or figure's first or last day lead, as computed or as seen? */
+export function isStarLead(lead: EntryLead): lead is StarLead {
+  return lead.type === 'marker' || lead.type === 'marker-as-seen';
+}
 
 /** Days from the lead day, in order. */
 export interface EntryOffsets {
@@ -55,6 +83,9 @@ export const ENTRY_WARNINGS = [
   'window-shortened-by-last-date',
   'belief-not-agreed-to-print',
   'windows-overlap',
+  'waits-for-actual-day',
+  'anchor-without-days',
+  'anchor-gone',
 ] as const;
 export type EntryWarning = (typeof ENTRY_WARNINGS)[number];
 
@@ -81,12 +112,26 @@ export interface OccurrenceDays {
   notes: SkyNote[];
 }
 
+/** From what the window is counted, where it is not a computed day or a fixed date. */
+export const COUNTED_BASES = ['seen', 'usual', 'planned', 'actual', 'waiting', 'gone'] as const;
+
+export interface CountedDays {
+  basis: (typeof COUNTED_BASES)[number];
+  /** The days that it is counted from: early days from the first of them, late days from the last. */
+  from: IsoDate | null;
+  to: IsoDate | null;
+  /** The other counting: as computed beside as seen, as planned beside as done or while it waits. */
+  beside: EntryWindow | null;
+}
+
 export interface EntryDates {
   starOutcome: StarOutcome | null;
   phenomenonOutcome: PhenomenonOutcome | null;
   /** Only where a marker beyond a star's first and last days leads. */
   sky?: { outcome: SkyMarkerOutcome; reason: SkyMarkerReason | null } | undefined;
   marker: OccurrenceDays | null;
+  /** Only where something else is counted from. */
+  counted?: CountedDays | undefined;
   window: EntryWindow | null;
   warnings: EntryWarning[];
 }

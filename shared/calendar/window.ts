@@ -4,6 +4,8 @@ import type { EntryOffsets, EntryWindow, MonthDay } from './entry-model.js';
 export interface WindowInput {
   /** Day number of the marker's expected day, or of the fixed date that leads. */
   leadDayNumber: number;
+  /** Where a spell of days leads: its last one. Early days count from the first, late days from the last. */
+  leadLastDayNumber?: number | undefined;
   offsets: EntryOffsets;
   /** The responsible office's last date; null where the entry has none. */
   lastDate: MonthDay | null;
@@ -25,11 +27,17 @@ export interface WindowResult {
  * The earlier of last date and offset counts. Best days behind it fall away; where no best day is left the window
  * is closed, even if a few early days remain: nobody chose those days as good ones.
  */
-export function windowOf({ leadDayNumber, offsets, lastDate, protectiveWatch }: WindowInput): WindowResult {
+export function windowOf({
+  leadDayNumber,
+  leadLastDayNumber = leadDayNumber,
+  offsets,
+  lastDate,
+  protectiveWatch,
+}: WindowInput): WindowResult {
   const earliest = leadDayNumber + offsets.earliestDays;
   const bestFrom = leadDayNumber + offsets.bestFromDays;
-  const bestTo = leadDayNumber + offsets.bestToDays;
-  const lastByOffset = leadDayNumber + offsets.lastAdvisedDays;
+  const bestTo = leadLastDayNumber + offsets.bestToDays;
+  const lastByOffset = leadLastDayNumber + offsets.lastAdvisedDays;
 
   const fixedLast =
     lastDate === null || protectiveWatch ? null : lastDateFor(lastDate, earliest, lastByOffset);

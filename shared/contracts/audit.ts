@@ -42,6 +42,8 @@ export const AUDIT_ACTIONS = [
   'note-closed',
   'note-reopened',
   'item-withdrawn',
+  'actual-days-written',
+  'actual-days-removed',
   'variant-added',
   'variant-changed',
   'variant-removed',

@@ -1,17 +1,20 @@
 import { z } from 'zod';
 import { id, instant, isoDate, line, listOf, monthDay, rowVersion, text } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
+import { actualDays } from './actual-days.js';
+import { entryLead } from './entry-lead.js';
+import { eventRecord } from './event-record.js';
 import { ROLES } from './people.js';
 import { groupFitsLevel, PLAIN_DETAILS, sharingDetails, sharingLevel } from './sharing.js';
-import { skyMarkerSpec } from './sky-markers.js';
-import { markerKey, occurrenceDays, phenomenon } from './stars.js';
+import { occurrenceDays } from './stars.js';
 import {
-  MOON_COUNT,
   PHENOMENON_OUTCOMES,
   SKY_MARKER_OUTCOMES,
   SKY_MARKER_REASONS,
   STAR_OUTCOMES,
 } from '../sky/vocabulary.js';
+
+export { entryLead, type EntryLead } from './entry-lead.js';
 
 /** Calendars are made for these civil Gregorian years. */
 export const CALENDAR_FIRST_YEAR = 1900;
@@ -59,23 +62,6 @@ export const ENTRY_ICONS = [
 ] as const;
 export const entryIcon = z.enum(ENTRY_ICONS);
 export type EntryIcon = (typeof ENTRY_ICONS)[number];
-
-/** Which of the year's occurrences, where there are two. */
-export const occurrence = z.union([z.literal(1), z.literal(2)]);
-/** A year has up to thirteen Moons of a kind. */
-const signOccurrence = z
-  .number('not-a-number')
-  .int('moon-count')
-  .min(1, 'moon-count')
-  .max(MOON_COUNT.max, 'moon-count');
-
-export const entryLead = z.discriminatedUnion('type', [
-  z.strictObject({ type: z.literal('marker'), markerKey, phenomenon, occurrence }),
-  /** A marker beyond a star's first and last days: Sun, nights, culminations. */
-  z.strictObject({ type: z.literal('sky'), spec: skyMarkerSpec, occurrence: signOccurrence }),
-  z.strictObject({ type: z.literal('fixed-date'), date: monthDay, source: line(200, 1) }),
-]);
-export type EntryLead = z.infer<typeof entryLead>;
 
 const offsetDays = z
   .number('not-a-number')
@@ -140,6 +126,8 @@ const entryFields = z.strictObject({
     .optional(),
   /** Beside the level; left out where there is nothing to say, so that older texts and hashes stay as they are. */
   sharing: sharingDetails.optional(),
+  /** What else an event needs; left out where nothing of it is said. */
+  record: eventRecord.optional(),
 });
 
 /** What an officer writes; everything that elders answer to. */
@@ -175,6 +163,9 @@ export const ENTRY_WARNINGS = [
   'window-shortened-by-last-date',
   'belief-not-agreed-to-print',
   'windows-overlap',
+  'waits-for-actual-day',
+  'anchor-without-days',
+  'anchor-gone',
 ] as const;
 export const entryWarning = z.enum(ENTRY_WARNINGS);
 export type EntryWarning = (typeof ENTRY_WARNINGS)[number];
@@ -189,6 +180,15 @@ export const entryWindow = z.strictObject({
 });
 export type EntryWindow = z.infer<typeof entryWindow>;
 
+/** From what the window is counted, where it is not a computed day or a fixed date. */
+const countedDays = z.strictObject({
+  basis: z.enum(['seen', 'usual', 'planned', 'actual', 'waiting', 'gone']),
+  from: isoDate.nullable(),
+  to: isoDate.nullable(),
+  /** The other counting: as computed beside as seen, as planned beside as done or while it waits. */
+  beside: entryWindow.nullable(),
+});
+
 /** What the engine and the calendar rules make of an entry; kept unchanged in a version. */
 export const entryDates = z.strictObject({
   starOutcome: z.enum(STAR_OUTCOMES).nullable(),
@@ -199,6 +199,8 @@ export const entryDates = z.strictObject({
     .optional(),
   /** The occurrence that leads; null for a fixed date or where there is none. */
   marker: occurrenceDays.nullable(),
+  /** Only where it is counted from something else, so that what was frozen before stays as it is. */
+  counted: countedDays.optional(),
   /** Null where the leading marker has no date, or the last date closes the window. */
   window: entryWindow.nullable(),
   warnings: z.array(entryWarning),
@@ -216,6 +218,8 @@ export const entry = z.strictObject({
   updatedAt: instant,
   /** The asking person's own, to write on: of a kept thing its giver's, else the officers'. */
   mine: z.boolean(),
+  /** When it was really done, where that is known. */
+  actual: actualDays.optional(),
 });
 export type Entry = z.infer<typeof entry>;
 

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { CLARITIES, PHENOMENON_OUTCOMES, SKY_NOTES, STAR_OUTCOMES } from '../sky/vocabulary.js';
-import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR, occurrence } from './calendars.js';
+import { CALENDAR_FIRST_YEAR, CALENDAR_LAST_YEAR } from './calendars.js';
+import { occurrence } from './entry-lead.js';
 import { id, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';

@@ -26,6 +26,7 @@ import { sheetsEndpoints } from './sheets.js';
 import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
 import { todayEndpoints } from './today.js';
+import { actualDaysEndpoints } from './actual-days.js';
 import { variantsEndpoints } from './variants.js';
 import { withdrawalsEndpoints } from './withdrawals.js';
 import { versionsEndpoints } from './versions.js';
@@ -49,6 +50,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   airEndpoints,
   figuresEndpoints,
   calendarsEndpoints,
+  actualDaysEndpoints,
   variantsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

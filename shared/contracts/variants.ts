@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { entryDates, entryLead, entryOffsets } from './calendars.js';
 import { id, instant, line, listOf, rowVersion, text } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
+import { BASES, CONFIDENCES } from './event-record.js';
 import { groupFitsLevel, PLAIN_DETAILS, sharingDetails, sharingLevel } from './sharing.js';
 
 export const VARIANTS_MAX = 12;
@@ -14,10 +15,6 @@ export const VARIANT_DIFFERENCES = [
   'other-rule',
   'not-on-a-board',
 ] as const;
-/** Words, never numbers: how sure its giver is. */
-export const CONFIDENCES = ['strong', 'fair', 'weak', 'being-tried'] as const;
-/** What it rests on. */
-export const BASES = ['handed-down', 'own-years', 'recorded', 'trial'] as const;
 
 const variantFields = z.strictObject({
   difference: z.enum(VARIANT_DIFFERENCES),
@@ -39,6 +36,9 @@ const variantFields = z.strictObject({
 /** Another keeper's timing of the same work or rite: a full copy, beside the entry and never joined with it. */
 export const variantInput = variantFields.superRefine((variant, context) => {
   const { groupId } = variant.sharing ?? PLAIN_DETAILS;
+  if (variant.lead.type === 'entry-planned' || variant.lead.type === 'entry-actual') {
+    context.addIssue({ code: 'custom', path: ['lead'], message: 'not-in-list' });
+  }
   groupFitsLevel({ level: variant.sharingLevel, groupId }, (message) => {
     context.addIssue({ code: 'custom', path: ['sharing', 'groupId'], message });
   });

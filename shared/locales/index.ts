@@ -1,4 +1,5 @@
 import { texts as air } from './en/air.js';
+import { texts as anchors } from './en/anchors.js';
 import { texts as attachments } from './en/attachments.js';
 import { texts as audit } from './en/audit.js';
 import { texts as calendars } from './en/calendars.js';
@@ -19,6 +20,7 @@ import { texts as places } from './en/places.js';
 import { texts as print } from './en/print.js';
 import { texts as privacy } from './en/privacy.js';
 import { texts as problems } from './en/problems.js';
+import { texts as record } from './en/record.js';
 import { texts as reviews } from './en/reviews.js';
 import { texts as session } from './en/session.js';
 import { texts as sharing } from './en/sharing.js';
@@ -52,10 +54,12 @@ export const en = {
   air,
   figures,
   calendars,
+  record,
   reviews,
   sharing,
   consents,
   sheets,
+  anchors,
   attachments,
   audit,
   print,

@@ -6,8 +6,10 @@ import { useGiverWords } from './giver-words.js';
 import { useSharingWords } from './sharing-words.js';
 import { useEntryWords, type NamesByKey } from './entry-words.js';
 import { useMarkerDayWords } from './marker-day-words.js';
+import { useCountedWords } from './counted-words.js';
+import { useRecordFacts } from './record-facts.js';
 
-export type FactGroup = 'what' | 'when' | 'signs' | 'late' | 'whose';
+export type FactGroup = 'what' | 'when' | 'signs' | 'work' | 'trust' | 'whose';
 
 export interface Fact {
   key: string;
@@ -16,7 +18,7 @@ export interface Fact {
 }
 
 export interface EntryFacts {
-  /** Everything that an entry says, in five groups; what is empty is left out. */
+  /** Everything that an entry says, in six groups; what is empty is left out. */
   groups: (
     content: EntryInput,
     dates: EntryDates | null,
@@ -27,17 +29,24 @@ export interface EntryFacts {
 
 /** An entry to be read. Needs the texts `calendars` and `sky`. */
 export function useEntryFacts(): EntryFacts {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'anchors']);
   const sharing = useSharingWords();
   const giverWords = useGiverWords();
   const dateWords = useDateWords();
   const entryWords = useEntryWords();
   const markerDays = useMarkerDayWords();
+  const recordFacts = useRecordFacts();
+  const counted = useCountedWords();
   return useMemo(() => {
     const told = (facts: Fact[]) => facts.filter(({ value }) => value !== '');
     const when = (content: EntryInput, dates: EntryDates | null, year: number, markers: NamesByKey) => [
       { key: 'lead', label: t('form.goesBy'), value: entryWords.leadAlone(content, markers) },
       { key: 'sign', label: t('form.theSign'), value: dates?.marker ? markerDays.about(dates.marker) : '' },
+      {
+        key: 'counted',
+        label: t('anchors:countedFrom'),
+        value: dates?.counted ? counted(dates.counted) : '',
+      },
       {
         key: 'days',
         label: t('form.fourDays'),
@@ -60,25 +69,34 @@ export function useEntryFacts(): EntryFacts {
       },
     ];
     return {
-      groups: (content, dates, year, markers) => ({
-        what: told([
-          { key: 'kind', label: t('form.kind'), value: t(`kind.${content.kind}`) },
-          { key: 'crop', label: t('form.crop'), value: content.crop },
-          { key: 'notes', label: t('form.notes'), value: content.notes },
-          { key: 'caution', label: t('form.caution'), value: content.caution },
-        ]),
-        when: told(when(content, dates, year, markers)),
-        signs: told([{ key: 'signs', label: t('form.otherSigns'), value: content.otherSigns }]),
-        late: told([{ key: 'late', label: t('form.ifLate'), value: content.ifLate }]),
-        whose: told([
-          { key: 'giver', label: t('form.giver'), value: giverWords(content.giver) },
-          {
-            key: 'level',
-            label: t('form.sharingLevel'),
-            value: sharing(content.sharingLevel, content.sharing),
-          },
-        ]),
-      }),
+      groups: (content, dates, year, markers) => {
+        const record = recordFacts(content.record);
+        return {
+          what: told([
+            { key: 'kind', label: t('form.kind'), value: t(`kind.${content.kind}`) },
+            { key: 'crop', label: t('form.crop'), value: content.crop },
+            ...record.what,
+            { key: 'notes', label: t('form.notes'), value: content.notes },
+            { key: 'caution', label: t('form.caution'), value: content.caution },
+          ]),
+          when: told([...when(content, dates, year, markers), ...record.when]),
+          signs: told([
+            { key: 'signs', label: t('form.otherSigns'), value: content.otherSigns },
+            ...record.signs,
+          ]),
+          work: told([{ key: 'late', label: t('form.ifLate'), value: content.ifLate }, ...record.work]),
+          trust: record.trust,
+          whose: told([
+            { key: 'giver', label: t('form.giver'), value: giverWords(content.giver) },
+            ...record.whose,
+            {
+              key: 'level',
+              label: t('form.sharingLevel'),
+              value: sharing(content.sharingLevel, content.sharing),
+            },
+          ]),
+        };
+      },
     };
-  }, [t, sharing, giverWords, dateWords, entryWords, markerDays]);
+  }, [t, sharing, giverWords, dateWords, entryWords, markerDays, recordFacts, counted]);
 }

@@ -3,6 +3,7 @@ import { useTranslation } from 'react-i18next';
 import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { useDateWords } from './date-words.js';
+import { useEntryTitles } from './entry-titles.js';
 import { markerName, type NamesByKey } from './marker-names.js';
 import { useSkySignWords } from './sky-sign-words.js';
 
@@ -41,9 +42,10 @@ export interface EntryWords {
 const ANY_YEAR = 2027;
 
 export function useEntryWords(): EntryWords {
-  const { t } = useTranslation(['calendars', 'sky']);
+  const { t } = useTranslation(['calendars', 'sky', 'anchors']);
   const dates = useDateWords();
   const sign = useSkySignWords();
+  const titles = useEntryTitles();
   return useMemo(() => {
     const leadWords = (group: 'lead' | 'leadAlone', lead: EntryLead, markers: NamesByKey) => {
       if (lead.type === 'fixed-date') {
@@ -57,8 +59,31 @@ export function useEntryWords(): EntryWords {
           return t(`${group}.skyNth`, { sign: name, nth: lead.occurrence });
         return t(`${group}.${lead.occurrence === 2 ? 'skySecond' : 'sky'}`, { sign: name });
       }
+      if (lead.type === 'nature-sign') {
+        const { from, to } = lead.usual;
+        return t(`anchors:${group}.nature`, {
+          name: lead.name,
+          from: dates.day({ year: ANY_YEAR, ...from }),
+          to: dates.day({ year: ANY_YEAR, ...to }),
+        });
+      }
+      if (lead.type === 'entry-planned' || lead.type === 'entry-actual') {
+        const title = titles.get(lead.entryId);
+        if (lead.type === 'entry-actual')
+          return t(`anchors:${group}.actual`, { title: title ?? t('anchors:another') });
+        return t(`anchors:${group}.planned`, {
+          title: title ?? t('anchors:another'),
+          day: t(`anchors:day.${lead.day}`),
+        });
+      }
       if (lead.markerKey === '') return t(`${group}.none`);
       const names = markers.get(lead.markerKey);
+      if (lead.type === 'marker-as-seen') {
+        return t(`anchors:${group}.seen`, {
+          marker: names ? markerName(names) : lead.markerKey,
+          phenomenon: t(`sky:phenomenon.${lead.phenomenon}`),
+        });
+      }
       return t(`${group}.${lead.occurrence === 2 ? 'markerSecond' : 'marker'}`, {
         marker: names ? markerName(names) : lead.markerKey,
         phenomenon: t(`sky:phenomenon.${lead.phenomenon}`),
@@ -83,5 +108,5 @@ export function useEntryWords(): EntryWords {
       lead: ({ lead }, markers) => leadWords('lead', lead, markers),
       leadAlone: ({ lead }, markers) => leadWords('leadAlone', lead, markers),
     };
-  }, [t, dates, sign]);
+  }, [t, dates, sign, titles]);
 }

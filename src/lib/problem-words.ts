@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import { useTranslation } from 'react-i18next';
+import { listWords } from './list-words.js';
 import { ApiProblem } from './api-problem.js';
 
 /** Sentences for problems and field codes: what happened, what is safe, what to do. */
@@ -17,6 +18,11 @@ export function useProblemWords(): ProblemWords {
       if (!(cause instanceof ApiProblem)) return t('type.unknown');
       if (cause.slug === 'too-many-attempts' && cause.retryAfterS !== undefined) {
         return t('waitMinutes', { count: Math.ceil(cause.retryAfterS / 60) });
+      }
+      const named = `named.${cause.reason ?? ''}`;
+      if (cause.names.length > 0 && i18n.exists(named, { ns: 'problems' })) {
+        const names = listWords(cause.names, i18n.language);
+        return t(named as 'named.record-incomplete', { names });
       }
       const reason = cause.reason === undefined ? null : `reason.${cause.reason}`;
       if (reason !== null && i18n.exists(reason, { ns: 'problems' })) return t(reason as 'type.unknown');

@@ -1,3 +1,4 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryLead } from '#shared/contracts/calendars.js';
 import {
   COMPASS_POINTS,
@@ -13,8 +14,8 @@ export function endOfNight(phenomenon: Phenomenon): 'dawn' | 'dusk' {
 
 /** The same for whatever leads an entry; noon and the day as a whole go with the morning's light. */
 export function endOfLead(lead: EntryLead): 'dawn' | 'dusk' {
-  if (lead.type === 'marker') return endOfNight(lead.phenomenon);
-  if (lead.type === 'fixed-date') return 'dawn';
+  if (isStarLead(lead)) return endOfNight(lead.phenomenon);
+  if (lead.type !== 'sky') return 'dawn';
   const time = skyMarkerTimeOf(lead.spec);
   return time === 'evening' || time === 'night' ? 'dusk' : 'dawn';
 }

@@ -257,6 +257,7 @@ function bodyOf(endpoint: Endpoint, role: Role | null, village: Village): object
     // An elder writes what is kept; the village's entries are the officer's.
     addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
+    putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
     addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),

@@ -61,6 +61,10 @@ describe('a withdrawn entry', () => {
       ...{ titleOfficer: `Do ${WORD}`, titleVillage: WORD, notes: WORD, caution: WORD, otherSigns: WORD },
       ...{ ifLate: WORD, giver: WORD, giverId: village.elder.personId },
     });
+    const done = { from: '2027-06-24', to: null, saidBy: WORD, plots: WORD };
+    await village.officer
+      .put(`/api/calendars/${calendarId}/entries/${entry.id}/actual-days`, done)
+      .expect(200);
     await addPicture(village.officer, entry.id, { subjectType: 'entry', title: WORD });
     await addVariant(village.elder3, calendarId, entry.id, { giver: WORD, note: WORD, otherSigns: WORD });
     const version = await submit(village.officer, calendarId);

@@ -30,6 +30,7 @@ import { NoteEntity } from './note.entity.js';
 import { EntryVariantEntity } from './entry-variant.entity.js';
 import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
+import { ActualDateEntity } from './actual-date.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
 
 /** Named one by one: a glob would miss a file quietly, and breaks in a build. */
@@ -66,5 +67,6 @@ export const ENTITIES = [
   NoteAnswerEntity,
   EntryVariantEntity,
   VersionVariantEntity,
+  ActualDateEntity,
   ConsentEntity,
 ];

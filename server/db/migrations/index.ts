@@ -14,6 +14,7 @@ import { AnswersOfItsPeople1798200000000 } from './1798200000000-answers-of-its-
 import { ByEar1798300000000 } from './1798300000000-by-ear.js';
 import { BeliefConsents1798400000000 } from './1798400000000-belief-consents.js';
 import { Deaths1798410000000 } from './1798410000000-deaths.js';
+import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -33,4 +34,5 @@ export const MIGRATIONS = [
   ByEar1798300000000,
   BeliefConsents1798400000000,
   Deaths1798410000000,
+  ActualDates1798500000000,
 ];

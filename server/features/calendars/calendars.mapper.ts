@@ -1,3 +1,4 @@
+import type { ActualDays } from '#shared/contracts/actual-days.js';
 import type { Calendar, Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { PlaceSnapshot } from '#shared/contracts/stars.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -40,9 +41,11 @@ export interface EntryFacts {
   /** Among those that the person sees, so that no gap shows what they do not see. */
   position: number;
   mine: boolean;
+  actual: ActualDays | null;
 }
 
-export function toEntry({ row, content, dates, updatedByName, position, mine }: EntryFacts): Entry {
+export function toEntry(facts: EntryFacts): Entry {
+  const { row, content, dates, updatedByName, position, mine, actual } = facts;
   return {
     id: row.id,
     calendarId: row.calendarId,
@@ -53,6 +56,7 @@ export function toEntry({ row, content, dates, updatedByName, position, mine }: 
     updatedBy: updatedByName,
     updatedAt: row.updatedAt.toISOString(),
     mine,
+    ...(actual && { actual }),
   };
 }
 

@@ -9,6 +9,7 @@ import { AppError, notFound } from '../../http/app-error.js';
 import { everyVillageFigure } from '../figures/village-figures.service.js';
 import { toPlaceSnapshot } from './calendars.mapper.js';
 import { liveEntries } from './calendars.repository.js';
+import { withAnchors } from './anchored-draft.service.js';
 import type { SkyDatesService } from './sky-dates.service.js';
 
 export interface DraftEntry {
@@ -88,5 +89,5 @@ export async function readDraft(
     const own = dates[index];
     return own ? [{ row, dates: own }] : [];
   });
-  return { place, entries };
+  return { place, entries: await withAnchors(manager, calendar.year, entries) };
 }

@@ -22,10 +22,12 @@ import { withKeptGiver, withNaming } from '../../policy/giver-naming.js';
 import { isKept } from '../../policy/policy.js';
 import { copySharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { actualDaysOf } from '../actual-days/known-days.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
 import { lockOpenDraft, readDraft, recordContribution } from './draft.service.js';
@@ -55,6 +57,7 @@ export class EntriesService {
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
       await shareNewEntry(manager, actor, id, content);
+      await this.expectAnchored(manager, actor, calendar, id, 'lead');
       await writeOrder(manager, [...entries.map((entry) => entry.id), id]);
       await this.record(manager, actor, calendarId, 'entry-added', id);
       return this.one(manager, actor, calendar, id);
@@ -83,6 +86,7 @@ export class EntriesService {
           { id: entryId, version: input.version },
           { content, updatedBy: actor.person.id, updatedAt: this.clock.now() },
         );
+        await this.expectAnchored(manager, actor, calendar, entryId, 'content.lead');
       }
       return this.one(manager, actor, calendar, entryId);
     });
@@ -105,6 +109,7 @@ export class EntriesService {
   async remove(actor: Actor, calendarId: string, entryId: string): Promise<void> {
     await this.change(calendarId, async (manager) => {
       await this.writable(manager, actor, calendarId, entryId);
+      await expectNothingHangsOn(manager, await this.viewer(manager, actor), calendarId, entryId);
       const at = this.clock.now();
       await manager.update(EntryEntity, { id: entryId }, this.touched(actor, { deletedAt: at }));
       await writeOrder(
@@ -174,6 +179,24 @@ export class EntriesService {
     return id;
   }
 
+  private async expectAnchored(
+    manager: EntityManager,
+    actor: Actor,
+    { id: calendarId, year }: CalendarEntity,
+    entryId: string,
+    field: string,
+  ): Promise<void> {
+    const { content } = await liveEntry(manager, calendarId, entryId);
+    expectSeenInYear(content, year, field);
+    await expectGoodAnchor(
+      manager,
+      await this.viewer(manager, actor),
+      calendarId,
+      { id: entryId, content },
+      field,
+    );
+  }
+
   private touched(actor: Actor, change: { deletedAt: Date | null } = { deletedAt: null }) {
     return { ...change, updatedBy: actor.person.id, updatedAt: this.clock.now() };
   }
@@ -227,6 +250,10 @@ export class EntriesService {
       manager,
       seen.map(({ row }) => row.updatedBy),
     );
+    const actual = await actualDaysOf(
+      manager,
+      seen.map(({ row }) => row.id),
+    );
     const items = seen.map(({ row, dates }, position) => {
       const warnings = colliding.has(row.id)
         ? inOrder(new Set([...dates.warnings, 'windows-overlap' as const]))
@@ -235,7 +262,8 @@ export class EntriesService {
       const shared = sight.sharedOf(row.id);
       const mine = mayWrite(viewer, shared);
       const content = withNaming(viewer, shared, row.content);
-      return toEntry({ row, content, dates: { ...dates, warnings }, updatedByName, position, mine });
+      const facts = { row, content, dates: { ...dates, warnings }, updatedByName, position, mine };
+      return toEntry({ ...facts, actual: actual.get(row.id) ?? null });
     });
     const keptCount = entries.filter(({ row }) => sight.appearance(thingOf(row)) === 'blank').length;
     return { items, nextCursor: null, keptCount };
@@ -321,6 +349,14 @@ async function expectKnownMarker(
     lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
     'unknown-marker',
   );
+}
+
+/** What was seen belongs to the calendar's year, or comes just before or after it. */
+function expectSeenInYear({ lead }: EntryInput, year: number, field: string): void {
+  if (lead.type !== 'marker-as-seen' || lead.seen === null) return;
+  if (Math.abs(Number(lead.seen.date.slice(0, 4)) - year) > 1) {
+    throw invalidField(`${field}.seen.date`, 'not-of-this-year');
+  }
 }
 
 /** Names of the fields that differ; what stands in them stays out of the record. */

@@ -1,7 +1,10 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import type { EntityManager } from 'typeorm';
+import { ActualDateEntity } from '../../db/entities/actual-date.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { withoutGiver } from '../../policy/giver-naming.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
 import { lockCalendar } from './draft.service.js';
 import { markerKeyOfLead } from './sky-dates.service.js';
@@ -24,7 +27,10 @@ export async function takeNameOffDraft(manager: EntityManager, entryId: string):
   const { giverId: _giver, ...content } = row.content;
   // The entry's own words about how it is shared follow, so that the next edit does not ask for a wider circle.
   const sharing = { ...(content.sharing ?? PLAIN_DETAILS), naming: 'not-named' as const };
-  await manager.update(EntryEntity, { id: entryId }, { content: { ...content, giver: '', sharing } });
+  await manager.update(EntryEntity, { id: entryId }, { content: { ...withoutGiver(content), sharing } });
+  if (content.giver !== '') {
+    await manager.update(ActualDateEntity, { entryId, saidBy: content.giver }, { saidBy: '' });
+  }
 }
 
 /**
@@ -47,7 +53,7 @@ export async function leadByStarInstead(
 }
 
 function ledBy({ lead }: EntryInput, markerKey: string): EntryInput['lead'] {
-  if (lead.type === 'marker') return { ...lead, markerKey };
+  if (isStarLead(lead)) return { ...lead, markerKey };
   if (lead.type === 'sky' && markerKeyOfLead(lead) !== null) {
     return { ...lead, spec: { ...lead.spec, markerKey } as typeof lead.spec };
   }

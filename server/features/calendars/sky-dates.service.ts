@@ -1,4 +1,6 @@
-import { entryDatesOf } from '#shared/calendar/entry-dates.js';
+import { anchorOf } from '#shared/calendar/anchors.js';
+import { entryDatesFromDays, entryDatesOf, type AnchorDays } from '#shared/calendar/entry-dates.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryDates, EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import type { FrozenMarker } from '#shared/contracts/versions.js';
@@ -7,6 +9,9 @@ import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { SkyMarkerYearsService } from '../sky-markers/sky-marker-years.service.js';
 import { SkyYearsService } from '../stars/sky-years.service.js';
+
+/** Of entries that are counted from others the sky says nothing; whoever has all of them at hand does. */
+const UNTOLD: AnchorDays = { basis: 'gone', spell: null, planned: null };
 
 /** What the sky gives the entries of a calendar. Each marker's year is computed once, however many go by it. */
 export class SkyDatesService {
@@ -27,7 +32,8 @@ export class SkyDatesService {
       if (lead.type === 'sky') {
         return entryDatesOf(content, year, this.skyMarkers.year(place, year, lead.spec));
       }
-      const markerYear = lead.type === 'marker' ? (markerYears.get(lead.markerKey) ?? null) : null;
+      if (anchorOf(lead) !== null) return entryDatesFromDays(content, year, null, UNTOLD);
+      const markerYear = isStarLead(lead) ? (markerYears.get(lead.markerKey) ?? null) : null;
       return entryDatesOf(content, year, markerYear);
     });
   }
@@ -56,7 +62,7 @@ export function knowsMarker(markerKey: string, figures: readonly SkyFigure[]): b
 
 /** The star or figure that a lead names, for whatever it goes by it; null where none is named. */
 export function markerKeyOfLead(lead: EntryLead): string | null {
-  if (lead.type === 'marker') return lead.markerKey;
+  if (isStarLead(lead)) return lead.markerKey;
   return lead.type === 'sky' && 'markerKey' in lead.spec ? lead.spec.markerKey : null;
 }
 
@@ -67,5 +73,5 @@ export function markerKeysOf(contents: readonly EntryInput[]): string[] {
 
 /** Only those whose first or last days are asked for. */
 function firstAndLastKeysOf(contents: readonly EntryInput[]): string[] {
-  return markerKeysOf(contents.filter(({ lead }) => lead.type === 'marker'));
+  return markerKeysOf(contents.filter(({ lead }) => isStarLead(lead)));
 }

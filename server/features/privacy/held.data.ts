@@ -41,6 +41,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   calendar_version: row('knowledge', ['submitted_by'], ['id', 'calendar_id']),
   draft_contribution: row('knowledge', ['person_id'], 'all'),
   entry: row('knowledge', ['updated_by'], ['id', 'calendar_id', 'updated_at']),
+  actual_date: row('knowledge', ['typed_by'], ['entry_id', 'first_day', 'last_day', 'typed_at']),
   entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   item_sharing: row('knowledge', ['giver_id'], 'all'),

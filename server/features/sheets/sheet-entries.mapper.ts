@@ -1,4 +1,5 @@
 import { boardOf } from '#shared/calendar/variants.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
@@ -39,12 +40,23 @@ export function toSheetEntries(
       fixedDate: fixedDateOf({ content, dates }),
       dateSetBy: dateSetBy(content),
       lastAdvised: lastAdvisedOf({ content, dates }, year),
-      signs: content.otherSigns,
-      signsNeeded: null,
-      ifLate: content.ifLate,
+      signs: signsOf(content),
+      signsNeeded: content.record?.signs.needed ?? null,
+      ifLate: lateOf(content),
       caution: content.caution,
       whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
     }));
+}
+
+/** Signs by name, those of the record and those written freely. */
+function signsOf({ otherSigns, record }: EntryInput): string {
+  const named = (record?.signs.list ?? []).map(({ name }) => name).join(', ');
+  return [named, otherSigns].filter((text) => text !== '').join('. ');
+}
+
+/** The first step and the one after it. */
+function lateOf({ ifLate, record }: EntryInput): string {
+  return [ifLate, record?.work.ifLaterStill ?? ''].filter((text) => text !== '').join('\n');
 }
 
 interface Line extends Body {
@@ -83,7 +95,7 @@ function linesOf(body: VersionEntryBody, files: Translate): Line[] {
 
 /** What is nothing but a marker stands among the markers, unless it has more to say. */
 function needsALine({ kind, lead, otherSigns, ifLate, caution, hasLastDate }: EntryInput): boolean {
-  if (kind !== 'marker-only' || lead.type === 'fixed-date') return true;
+  if (kind !== 'marker-only' || (lead.type !== 'sky' && !isStarLead(lead))) return true;
   return hasLastDate || [otherSigns, ifLate, caution].some((text) => text !== '');
 }
 
@@ -97,7 +109,8 @@ function fixedDateOf({ content, dates: { window } }: Body): string | null {
 
 /** Said once: where the same office set the last date, its name stands there. */
 function dateSetBy({ lead, lastDate }: EntryInput): string {
-  if (lead.type !== 'fixed-date' || lead.source === lastDate?.source) return '';
+  if (lead.type !== 'fixed-date' && lead.type !== 'nature-sign') return '';
+  if (lead.source === lastDate?.source) return '';
   return lead.source;
 }
 

@@ -2,6 +2,7 @@ import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { FrozenMarker, VersionEntryBody } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { skySign } from '#shared/calendar/sky-sign.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import { compassPoint } from '#shared/sky/index.js';
 import { markerIconKey, skySignIconKey } from '#shared/sheet/lead-icons.js';
 import type { Label, SheetMarker } from '#shared/sheet/sheet-model.js';
@@ -9,8 +10,8 @@ import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import type { Translate } from '../../print/translator.js';
 import { whyNoDate } from './why-no-date.js';
 
-type SkyLed = Exclude<EntryInput['lead'], { type: 'fixed-date' }>;
-type MarkerLead = Extract<SkyLed, { type: 'marker' }>;
+type SkyLed = Extract<EntryInput['lead'], { type: 'marker' | 'marker-as-seen' | 'sky' }>;
+type MarkerLead = Exclude<SkyLed, { type: 'sky' }>;
 
 export interface MarkerTexts {
   files: Translate;
@@ -31,8 +32,8 @@ export function toSheetMarkers(
   const found = new Map<string, { lead: SkyLed; dates: EntryDates; titles: Label | null }>();
   for (const { content, dates } of bodies) {
     const { lead } = content;
-    if (lead.type === 'fixed-date') continue;
-    const key = canonicalJson(lead);
+    if (lead.type !== 'sky' && !isStarLead(lead)) continue;
+    const key = markKeyOf(lead);
     const titles =
       content.kind === 'marker-only'
         ? { village: content.titleVillage, officer: content.titleOfficer }
@@ -52,6 +53,13 @@ export function toSheetMarkers(
       late: dates.marker?.late?.gregorian ?? null,
       whyNoDate: dates.marker ? null : whyNoDate(dates, year, texts),
     }));
+}
+
+/** A star as computed and as seen is one mark, by its computed day. */
+function markKeyOf(lead: SkyLed): string {
+  if (lead.type === 'sky') return canonicalJson(lead);
+  const { markerKey, phenomenon, occurrence } = lead;
+  return canonicalJson({ type: 'marker', markerKey, phenomenon, occurrence });
 }
 
 type MarkerWords = Pick<SheetMarker, 'key' | 'isStar' | 'icon' | 'titles' | 'phenomenon' | 'light'>;

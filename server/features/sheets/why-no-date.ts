@@ -11,6 +11,10 @@ export function whyNoDate(
   if (starOutcome !== null && starOutcome !== 'rises-and-sets') return t(`sheet.noDate.${starOutcome}`);
   if (warnings.includes('one-occurrence-only'))
     return t(`sheet.noDate.${sky ? 'fewer-of-them' : 'one-occurrence-only'}`, { year });
+  if (warnings.includes('waits-for-actual-day')) return t('sheet.noDate.waits');
+  if (warnings.includes('anchor-gone') || warnings.includes('anchor-without-days')) {
+    return t('sheet.noDate.anchor');
+  }
   if (sky && sky.reason !== null) return skyText(`noSign.${sky.reason}`);
   if (phenomenonOutcome !== null && phenomenonOutcome !== 'dated') {
     return t(`sheet.noDate.${phenomenonOutcome}`, { year });

@@ -1,3 +1,4 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { ComingMarker } from '#shared/contracts/today.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { civilDateFromIso, dayNumberFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
@@ -80,7 +81,7 @@ export class ComingMarkersService {
   private addLeads(found: Map<string, Candidate>, { header, entries }: PublishedCalendar): void {
     for (const { content } of entries) {
       const { lead } = content;
-      if (lead.type !== 'marker') continue;
+      if (!isStarLead(lead)) continue;
       const [markerYear] = this.skyYears.markerYears(header.place, header.year, [lead.markerKey]);
       const index = lead.occurrence - 1;
       const occurrence = markerYear?.phenomena[lead.phenomenon].occurrences[index];

@@ -9,6 +9,7 @@ import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
 import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import type { PublishedTrace } from '../../db/entities/withdrawal.entity.js';
+import { withoutGiver } from '../../policy/giver-naming.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { frozenEntries } from './versions.repository.js';
 
@@ -70,7 +71,7 @@ export async function takeNameOffFrozen(manager: EntityManager, entryId: string)
   for (const { id, bodyText } of await manager.findBy(VersionEntryEntity, { entryId })) {
     const body = JSON.parse(bodyText) as VersionEntryBody;
     const { giverId: _giver, ...content } = body.content;
-    const nameless = canonicalJson({ ...body, content: { ...content, giver: '' } });
+    const nameless = canonicalJson({ ...body, content: withoutGiver(content) });
     if (nameless !== bodyText) {
       await manager.update(VersionEntryEntity, { id }, { bodyText: nameless, redacted: true });
     }

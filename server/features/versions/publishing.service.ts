@@ -1,6 +1,7 @@
+import { signOffNeeds } from '#shared/calendar/sign-off-needs.js';
 import { mayBecome, versionLabel, type VersionState } from '#shared/calendar/version-state.js';
 import type { AuditAction } from '#shared/contracts/audit.js';
-import type { Version } from '#shared/contracts/versions.js';
+import type { Version, VersionEntryBody } from '#shared/contracts/versions.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
@@ -12,10 +13,13 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, notFound, type ProblemReason } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { draftWriterIds, forgetContributions, lockCalendar } from '../calendars/draft.service.js';
 import type { FrozenContentService } from './frozen-content.service.js';
 import { settleKeptEntries } from './kept-entries.service.js';
+import { thingOf } from './seen-content.service.js';
 import { seal, type SealedEntry } from './seal.service.js';
 import { earlierSeals, findVersion } from './versions.repository.js';
 import type { VersionsService } from './versions.service.js';
@@ -39,6 +43,7 @@ export class PublishingService {
       if (entries.length === 0) throw conflict('no-entries');
       if (header.weatherContact === '' || header.agricultureContact === '')
         throw conflict('contacts-missing');
+      await this.expectRecordsComplete(manager, actor, entries);
       const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
       const variants = entries.flatMap(({ entryId, variants: beside = [] }) =>
         beside.map((variant) => ({ ...variant, entryId })),
@@ -137,6 +142,31 @@ export class PublishingService {
       await this.record(manager, actor, row, 'recalled', { label: row.label });
       return { stateNote: note };
     });
+  }
+
+  /**
+   * A record that is begun says what its kind needs before anybody is asked about it. Of entries that the submitting
+   * person does not see nothing is asked: their people answer for them, and a refusal would tell of them.
+   */
+  private async expectRecordsComplete(
+    manager: EntityManager,
+    actor: Actor,
+    entries: readonly VersionEntryBody[],
+  ): Promise<void> {
+    const sight = await entrySight(
+      manager,
+      await viewerOf(manager, actor, this.clock.now()),
+      entries.map(thingOf),
+    );
+    const incomplete = entries.filter(
+      (entry) => sight.appearance(thingOf(entry)) === 'full' && signOffNeeds(entry.content).length > 0,
+    );
+    if (incomplete.length > 0) {
+      throw conflict(
+        'record-incomplete',
+        incomplete.map(({ content }) => content.titleOfficer),
+      );
+    }
   }
 
   private async change(

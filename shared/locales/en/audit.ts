@@ -47,6 +47,8 @@ export const texts = {
     'note-answered': '{{actor}} answered a note on “{{subject}}”.',
     'note-closed': '{{actor}} closed a note on “{{subject}}”.',
     'note-reopened': '{{actor}} opened a note on “{{subject}}” again.',
+    'actual-days-written': '{{actor}} wrote down when “{{subject}}” was really done.',
+    'actual-days-removed': '{{actor}} took back when “{{subject}}” was done.',
     'variant-added': '{{actor}} put another timing beside “{{subject}}”.',
     'variant-changed': '{{actor}} changed another timing beside “{{subject}}”.',
     'variant-removed': '{{actor}} took another timing beside “{{subject}}” out.',

@@ -215,7 +215,7 @@ export const texts = {
 
   form: {
     label: 'The entry',
-    group: { what: 'What', when: 'When', signs: 'Signs', late: 'If late', whose: 'Whose' },
+    group: { what: 'What', when: 'When', signs: 'Signs', work: 'Do', trust: 'Trust', whose: 'Whose' },
     nothing: 'nothing yet',
     titleOfficer: 'Name of the work or rite ({{language}})',
     titleVillage: 'In the words of the village ({{language}})',
@@ -408,6 +408,11 @@ export const texts = {
     'belief-not-agreed-to-print': 'An entry of belief is printed only after its giver was asked and agreed.',
     'windows-overlap':
       'Its best days and those of {{others}} lie within each other, and both are farm work on the same crop.',
+    'waits-for-actual-day':
+      'It is counted once the work before it is done. Write that day down at the other entry when it is known.',
+    'anchor-without-days': 'The work that it is counted from has no days this year.',
+    'anchor-gone':
+      'The work that it is counted from is not in the draft any more, or fewer people may see it than this entry.',
     sign: {
       'no-date-this-year': '{{sign}}: not in {{year}}, so this entry has no days.',
       'one-occurrence-only': '{{sign}}: {{year}} has fewer of them than this entry counts.',
@@ -421,6 +426,7 @@ export const texts = {
       changeLastDate: 'Change the last date',
       writeSigns: 'Write other signs',
       fixedDate: 'Go by a fixed date',
+      byPlanned: 'Go by its planned day',
     },
   },
 
@@ -484,6 +490,7 @@ export const texts = {
       otherSigns: 'Other signs',
       ifLate: 'If late',
       giver: 'Who gave it',
+      record: 'The record for elders and the field',
       agreedToPrint: 'Agreed to print',
       board: 'What the board shows',
       sharingLevel: 'Who may see it',

@@ -147,6 +147,8 @@ export const texts = {
       'none-in-this-year': 'its star has no such day in {{year}}.',
       'one-occurrence-only': 'its star has this day only once in {{year}}.',
       'fewer-of-them': '{{year}} has fewer of them.',
+      waits: 'its days are counted once the work before it is done.',
+      anchor: 'the work that it is counted from has no day.',
       closed: 'the last advised date, {{date}} ({{source}}), comes before its best days.',
     },
   },

@@ -56,6 +56,10 @@ export const texts = {
     'not-the-writer': 'Only who wrote a note closes it or opens it again.',
     'nothing-asked': 'No wider sharing is asked for here any more. Load the page again.',
     'giver-and-steward': 'A wider circle is for the giver and the steward together to allow.',
+    'record-incomplete':
+      'Some entries do not say yet what their kind needs. The list names what is missing at each.',
+    'entries-hang-on-it':
+      'Other entries count their days from this one. Let them go by something else first.',
     'too-many-variants': 'There are as many variants as an entry can have.',
     'not-paused': 'This is not paused. Load the page again.',
     'pause-over': 'The pause has lasted more than thirty days. Only its giver can end it now.',
@@ -127,6 +131,18 @@ export const texts = {
     'no-control-characters': 'Take out the invisible characters.',
     'not-a-number': 'Write a number.',
     'whole-days': 'Write a whole number of days.',
+    'unknown-entry': 'This entry is not in the draft any more. Choose another one.',
+    'anchor-circle':
+      'These entries would wait for each other in a circle. Let one of them go by something else.',
+    'anchor-kept':
+      'Fewer people see that entry than this one: its days would tell of it. Choose another, or keep this one in the same circle.',
+    'before-first': 'The last day lies before the first.',
+    'not-of-this-year': 'This day is too far from the year of the calendar.',
+    'days-range': 'This is more days than such a count can have.',
+    'days-order': 'The longer time comes last.',
+    'years-apart': 'Write a whole number of years, from 2 to 50.',
+    'signs-needed': 'No more signs can be needed than are named.',
+    'too-many-signs': 'An entry names at most 12 signs.',
     'choose-one': 'Choose at least one.',
     'no-duplicates': 'Each may stand here only once.',
     'not-in-list': 'Choose one of the values that are offered.',
@@ -200,6 +216,13 @@ export const texts = {
     'own-word-of-giver': 'Only the giver themself can say it here in their own word.',
     'proof-required': 'A yes needs its proof: a voice, a mark, a signature or a witness.',
     unknown: 'This was not accepted. What you typed is still here.',
+  },
+  /** Reasons that are said with what stands in the way. */
+  named: {
+    'entries-hang-on-it':
+      'These entries count their days from this one: {{names}}. Let them go by something else first.',
+    'record-incomplete':
+      'These entries do not say yet what their kind needs: {{names}}. The list names what is missing at each.',
   },
   formSummary_one: '{{count}} field needs another look. Nothing you typed is lost.',
   formSummary_other: '{{count}} fields need another look. Nothing you typed is lost.',

@@ -297,6 +297,11 @@ export const texts = {
       added: 'Other signs are named: “{{after}}”.',
       removed: 'The other signs, “{{before}}”, are taken out.',
     },
+    record: {
+      changed: 'Its record for elders and the field was changed: land, signs, people, trust or checks.',
+      added: 'It has a record for elders and the field now.',
+      removed: 'Its record for elders and the field is taken out.',
+    },
     ifLate: {
       changed: 'What to do if it is late is now “{{after}}”; before, “{{before}}”.',
       added: 'It says what to do if it is late: “{{after}}”.',

@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
 import type { Calendar, EntryInput } from '#shared/contracts/calendars.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
+import { EntryTitles } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import type { SharingValue } from '#src/lib/sharing-fields.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
@@ -83,8 +84,9 @@ function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps
   };
   const { selection, selected } = editor;
   const isEntryView = !selection.isWide && selected !== null;
+  const titles = new Map(editor.shown.map(({ id, content }) => [id, content.titleOfficer]));
   return (
-    <>
+    <EntryTitles titles={titles}>
       {selection.isWide ? (
         <WideView {...parts} />
       ) : isEntryView ? (
@@ -99,6 +101,6 @@ function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps
           setIsSubmitting(false);
         }}
       />
-    </>
+    </EntryTitles>
   );
 }

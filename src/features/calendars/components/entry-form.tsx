@@ -12,12 +12,18 @@ import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
 import type { Way } from '../model/warning-ways.js';
+import { ActualDaysPanel } from './actual-days-panel.js';
 import { ChooseLead } from './choose-lead.js';
 import { ElderRequests } from './elder-requests.js';
 import { EntryHeading } from './entry-heading.js';
 import { EntryTools } from './entry-tools.js';
 import { EntryWarnings } from './entry-warnings.js';
 import { LateFields, SignsFields, WhoseFields } from './other-fields.js';
+import { RecordSigns } from './record-signs.js';
+import { RecordNeeds } from './record-needs.js';
+import { RecordTrust } from './record-trust.js';
+import { RecordHeard, RecordWhat, RecordWhen } from './record-short.js';
+import { RecordWork } from './record-work.js';
 import { StaleChoice } from './stale-choice.js';
 import { UnsavedLine } from './unsaved-line.js';
 import { useGroups, type Groups } from './use-groups.js';
@@ -97,6 +103,10 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             onWay={(way) => goWay(way, form, groups, search)}
           />
           <GroupFolds form={form} groups={groups} onSearch={search} />
+          <RecordNeeds content={entry.content} />
+          {saved && (
+            <ActualDaysPanel calendarId={editor.calendar.id} year={editor.calendar.year} entry={saved} />
+          )}
           {saved && <VariantsPanel editor={editor} form={form} />}
           <UnsavedLine editor={editor} entry={entry} actions={actions} />
         </>
@@ -126,7 +136,7 @@ function firstGroups({ isKeepers }: FormState, isSaved: boolean): FieldGroup[] {
   return isSaved ? ['when'] : ['what', 'when'];
 }
 
-const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
+const GROUPS: readonly FieldGroup[] = ['what', 'when', 'signs', 'work', 'trust', 'whose'];
 
 interface GroupFoldsProps {
   form: FormState;
@@ -138,11 +148,12 @@ function GroupFolds({ form, groups, onSearch }: GroupFoldsProps) {
   const { t } = useTranslation('calendars');
   const facts = useEntryFacts().groups(form.content, form.dates, form.year, form.markers ?? new Map());
   const fields: Record<FieldGroup, ReactNode> = {
-    what: <WhatFields form={form} />,
-    when: <WhenFields form={form} onSearch={onSearch} />,
-    signs: <SignsFields form={form} />,
-    late: <LateFields form={form} />,
-    whose: <WhoseFields form={form} />,
+    what: withMore(<WhatFields form={form} />, <RecordWhat form={form} />),
+    when: withMore(<WhenFields form={form} onSearch={onSearch} />, <RecordWhen form={form} />),
+    signs: withMore(<SignsFields form={form} />, <RecordSigns form={form} />),
+    work: withMore(<LateFields form={form} />, <RecordWork form={form} />),
+    trust: <RecordTrust form={form} />,
+    whose: withMore(<WhoseFields form={form} />, <RecordHeard form={form} />),
   };
   return (
     <div className="mt-3">
@@ -162,6 +173,15 @@ function GroupFolds({ form, groups, onSearch }: GroupFoldsProps) {
   );
 }
 
+function withMore(first: ReactNode, more: ReactNode): ReactNode {
+  return (
+    <div className="grid gap-4">
+      {first}
+      {more}
+    </div>
+  );
+}
+
 /** Does what a way out of a warning says. */
 function goWay(way: Way, form: FormState, groups: Groups, search: () => void): void {
   switch (way.kind) {
@@ -171,6 +191,10 @@ function goWay(way: Way, form: FormState, groups: Groups, search: () => void): v
       return;
     case 'fixedDate':
       form.change({ leadType: 'fixed-date' });
+      groups.goTo('when');
+      return;
+    case 'byPlanned':
+      form.change({ leadType: 'entry-planned' });
       groups.goTo('when');
       return;
     case 'otherDay':

@@ -8,7 +8,7 @@ import type { Editor } from '../model/use-editor.js';
 import { ElderRequests } from './elder-requests.js';
 import { EntryHeading } from './entry-heading.js';
 
-const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
+const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'work', 'trust', 'whose'];
 
 /** The entry to be read: for those who do not write, and while the draft is locked. */
 export function EntryReading({

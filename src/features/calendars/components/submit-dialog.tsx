@@ -1,6 +1,7 @@
 import { Send } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { Link, useNavigate } from 'react-router-dom';
+import { listWords } from '#src/lib/list-words.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
@@ -36,13 +37,13 @@ function SubmitQuestion({ editor, onClose }: Omit<SubmitDialogProps, 'isOpen'>) 
   const { calendar, community, shown } = editor;
   const submit = useSubmitDraft(calendar.id);
   const checks = submitChecks(shown, community, calendar.outNumber);
-  const isReady = checks.missing.length === 0;
+  const isReady = checks.missing.length === 0 && checks.incomplete.length === 0;
   return (
     <div className="grid gap-4">
-      {isReady ? (
-        <WhatGoes editor={editor} checks={checks} />
-      ) : (
-        <WhatIsMissing editor={editor} checks={checks} />
+      {isReady && <WhatGoes editor={editor} checks={checks} />}
+      {checks.missing.length > 0 && <WhatIsMissing editor={editor} checks={checks} />}
+      {checks.incomplete.length > 0 && (
+        <WhatEntriesNeed checks={checks} calendarId={calendar.id} onOpen={onClose} />
       )}
       {isReady && <Remarks checks={checks} calendarId={calendar.id} onOpen={onClose} />}
       {submit.error !== null && (
@@ -133,6 +134,33 @@ function WhatIsMissing({ editor, checks }: { editor: Editor; checks: SubmitCheck
   );
 }
 
+/** Entries whose record does not say yet what their kind needs: each with what is missing, in words. */
+function WhatEntriesNeed({ checks: { incomplete }, calendarId, onOpen }: RemarksProps) {
+  const { t, i18n } = useTranslation(['record', 'calendars']);
+  return (
+    <Care blocked>
+      <p>
+        <strong>{t('needs.submitBlocked', { count: incomplete.length })}</strong>
+      </p>
+      <ul>
+        {incomplete.map(({ entry, needs }) => (
+          <li key={entry.id}>
+            <Link className="link-line" to={paths.calendar(calendarId, { entry: entry.id })} onClick={onOpen}>
+              {entry.content.titleOfficer || t('calendars:editor.untitled')}
+            </Link>{' '}
+            <span>
+              {listWords(
+                needs.map((need) => t(`needs.need.${need}`)),
+                i18n.language,
+              )}
+            </span>
+          </li>
+        ))}
+      </ul>
+    </Care>
+  );
+}
+
 interface RemarksProps {
   checks: SubmitChecks;
   calendarId: string;
@@ -140,13 +168,17 @@ interface RemarksProps {
 }
 
 function Remarks({ checks, calendarId, onOpen }: RemarksProps) {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'record']);
   const each = [
     { key: 'unsaved', entries: checks.unsaved },
     { key: 'remarks', entries: checks.remarked },
     { key: 'noLate', entries: checks.withoutLate },
   ] as const;
-  return each
+  const hint =
+    checks.withoutRecord.length > 0
+      ? t('record:needs.submitHint', { count: checks.withoutRecord.length })
+      : null;
+  const cares = each
     .filter(({ entries }) => entries.length > 0)
     .map(({ key, entries }) => (
       <Care key={key}>
@@ -154,6 +186,12 @@ function Remarks({ checks, calendarId, onOpen }: RemarksProps) {
         <EntryLinks entries={entries} calendarId={calendarId} onOpen={onOpen} />
       </Care>
     ));
+  return (
+    <>
+      {cares}
+      {hint !== null && <p className="text-small text-umber-soft">{hint}</p>}
+    </>
+  );
 }
 
 function EntryLinks({

@@ -2,10 +2,27 @@ import { useTranslation } from 'react-i18next';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { useRecordFacts } from '#src/lib/record-facts.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import { signed } from '#src/lib/signed.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import type { Unit } from '../model/stale-choice.js';
+
+function RecordValue({ record }: Pick<EntryInput, 'record'>) {
+  const { t } = useTranslation('calendars');
+  const facts = useRecordFacts();
+  if (record === undefined) return <span className="text-umber-soft">{t('stale.empty')}</span>;
+  const said = Object.values(facts(record)).flat();
+  return (
+    <ul>
+      {said.map(({ key, label, value }) => (
+        <li key={key}>
+          {label}: {value}
+        </li>
+      ))}
+    </ul>
+  );
+}
 
 /** Any year without a 29 February. */
 const PLAIN_YEAR = 2027;
@@ -59,6 +76,8 @@ export function UnitValue({
       return t(content.agreedToPrint ? 'stale.yes' : 'stale.no');
     case 'sharingLevel':
       return sharing(content.sharingLevel, content.sharing);
+    case 'record':
+      return <RecordValue record={content.record} />;
     default:
       return content[unit] === '' ? (
         <span className="text-umber-soft">{t('stale.empty')}</span>

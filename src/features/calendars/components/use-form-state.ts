@@ -1,5 +1,7 @@
 import { useMemo } from 'react';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
+import { circleTitles } from '../model/hung-entries.js';
 import type { FieldProblems } from '../model/field-problems.js';
 import type { FormState } from '../model/form-state.js';
 import { signOf } from '../model/signs.js';
@@ -10,10 +12,7 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
   const words = useProblemWords();
   const { selected, draft, shown, markers, signs, community, calendar, edits, newStart } = editor;
   const inUse = useMemo(
-    () =>
-      new Set(
-        shown.flatMap(({ content }) => (content.lead.type === 'marker' ? [content.lead.markerKey] : [])),
-      ),
+    () => new Set(shown.flatMap(({ content }) => (isStarLead(content.lead) ? [content.lead.markerKey] : []))),
     [shown],
   );
   if (selected === null || draft === null) return null;
@@ -38,5 +37,9 @@ export function useFormState(editor: Editor, problems: FieldProblems): FormState
     villageLanguage: community?.villageLanguage ?? null,
     officerLanguage: community?.officerLanguage ?? null,
     isKeepers: editor.isKeeper,
+    others: shown
+      .filter(({ id, saved }) => saved !== null && id !== selected.id)
+      .map(({ id, content }) => ({ id, title: content.titleOfficer })),
+    circle: circleTitles(selected.id, shown),
   };
 }

@@ -1,7 +1,8 @@
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
-import { BASES, CONFIDENCES, VARIANT_DIFFERENCES, type Variant } from '#shared/contracts/variants.js';
+import { BASES, CONFIDENCES } from '#shared/contracts/event-record.js';
+import { VARIANT_DIFFERENCES, type Variant } from '#shared/contracts/variants.js';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { PersonSelect, SharingFields } from '#src/lib/sharing-fields.js';

@@ -1,17 +1,21 @@
 import { useTranslation } from 'react-i18next';
 import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { useCountedWords } from '#src/lib/counted-words.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { endOfLead } from '#src/lib/sky-words.js';
 import { TextField } from '#src/ui/field.js';
 import { PickGroup } from '#src/ui/pick.js';
-import type { FormState } from '../model/form-state.js';
+import { isByStar, type FormState } from '../model/form-state.js';
+import { AnchorFields, NatureFields, SeenFields } from './anchor-fields.js';
 import { LastDateFields } from './last-date-fields.js';
 import { MarkerFields } from './marker-fields.js';
 import { MonthDayFields } from './month-day-fields.js';
 import { OffsetSteppers } from './offset-steppers.js';
 import { SignFields } from './sign-fields.js';
 import { WindowPicture } from './window-picture.js';
+
+const ANCHORED = ['entry-planned', 'entry-actual'] as const;
 
 /** When it is done: what leads, four days from it, and what may cut them short. */
 export interface WhenFieldsProps {
@@ -22,8 +26,9 @@ export interface WhenFieldsProps {
 }
 
 export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'anchors']);
   const days = useMarkerDayWords();
+  const counted = useCountedWords();
   const { draft, change, dates } = form;
   return (
     <div className="grid gap-4">
@@ -37,15 +42,29 @@ export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
           { value: 'marker', label: t('form.byMarker'), note: t('form.byMarkerNote') },
           { value: 'sky', label: t('form.bySign'), note: t('form.bySignNote') },
           { value: 'fixed-date', label: t('form.byDate'), note: t('form.byDateNote') },
+          { value: 'marker-as-seen', label: t('anchors:as-seen.name'), note: t('anchors:as-seen.note') },
+          { value: 'nature-sign', label: t('anchors:nature.name'), note: t('anchors:nature.note') },
+          ...(timingOnly === true
+            ? []
+            : ANCHORED.map((value) => ({
+                value,
+                label: t(`anchors:${value}.name`),
+                note: t(`anchors:${value}.note`),
+              }))),
         ]}
       />
-      {draft.leadType === 'marker' && <MarkerFields form={form} onSearch={onSearch} />}
+      {isByStar(draft) && <MarkerFields form={form} onSearch={onSearch} />}
+      {draft.leadType === 'marker-as-seen' && <SeenFields form={form} />}
+      {draft.leadType === 'nature-sign' && <NatureFields form={form} />}
+      {(draft.leadType === 'entry-planned' || draft.leadType === 'entry-actual') && (
+        <AnchorFields form={form} />
+      )}
       {draft.leadType === 'sky' && <SignFields form={form} onSearch={onSearch} />}
       {draft.leadType === 'fixed-date' && <FixedDateFields form={form} />}
       <div className="grid gap-3">
         <p>
           {dates?.marker && <strong>{days.about(dates.marker)}. </strong>}
-          <CountedFrom form={form} />
+          {dates?.counted ? counted(dates.counted) : <CountedFrom form={form} />}
         </p>
         <OffsetSteppers form={form} />
         <WindowPicture form={form} />

@@ -1,3 +1,5 @@
+import { isStarLead, type StarLead } from '#shared/calendar/entry-model.js';
+import type { PlannedDay, SeenDay } from '#shared/contracts/entry-lead.js';
 import {
   entryInput,
   type EntryInput,
@@ -5,25 +7,34 @@ import {
   type EntryOffsets,
   type FixedLastDate,
 } from '#shared/contracts/calendars.js';
+import { EMPTY_RECORD, type EventRecord } from '#shared/contracts/event-record.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 
 type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
 type SkyLead = Extract<EntryLead, { type: 'sky' }>;
 type FixedLead = Extract<EntryLead, { type: 'fixed-date' }>;
+type NatureLead = Extract<EntryLead, { type: 'nature-sign' }>;
 
 /**
  * An entry while it is being written. It keeps all ways to lead it, and the last date also while the entry is not
  * marked as having one: a change of mind loses nothing. What is saved is `contentOf(draft)`.
  */
-export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate'> {
+export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate' | 'record'> {
   leadType: EntryLead['type'];
   /** `markerKey` is empty until a star or figure is chosen. */
   marker: Omit<MarkerLead, 'type'>;
   /** Without a star until a sign is chosen; see `hasSign`. */
   sky: Omit<SkyLead, 'type'>;
   fixed: Omit<FixedLead, 'type'>;
+  /** The star's day as people saw it this year, where `leadType` is "as seen". */
+  seen: SeenDay | null;
+  nature: Omit<NatureLead, 'type'>;
+  /** The other entry, and which of its planned days; empty until one is chosen. */
+  anchor: { entryId: string; day: PlannedDay };
   lastDate: FixedLastDate;
+  /** Empty where nothing of it is said. */
+  record: EventRecord;
 }
 
 const NO_MARKER: EntryDraft['marker'] = { markerKey: '', phenomenon: 'heliacal-rising', occurrence: 1 };
@@ -32,6 +43,14 @@ const NO_SKY: EntryDraft['sky'] = {
   occurrence: 1,
 };
 const NO_FIXED: EntryDraft['fixed'] = { date: { month: 1, day: 1 }, source: '' };
+const NO_NATURE: EntryDraft['nature'] = {
+  name: '',
+  usual: { from: { month: 1, day: 1 }, to: { month: 1, day: 31 } },
+  source: '',
+};
+const NO_ANCHOR: EntryDraft['anchor'] = { entryId: '', day: 'bestFrom' };
+/** Leads that came after drafts were first kept on devices. */
+export const NEWER_LEADS = { seen: null, nature: NO_NATURE, anchor: NO_ANCHOR } satisfies Partial<EntryDraft>;
 const FIRST_OFFSETS: EntryOffsets = { earliestDays: 0, bestFromDays: 0, bestToDays: 7, lastAdvisedDays: 14 };
 
 export function draftOf(content: EntryInput): EntryDraft {
@@ -39,10 +58,14 @@ export function draftOf(content: EntryInput): EntryDraft {
   return {
     ...rest,
     leadType: lead.type,
-    marker: lead.type === 'marker' ? withoutType(lead) : NO_MARKER,
+    marker: isStarLead(lead) ? markerOf(lead) : NO_MARKER,
     sky: lead.type === 'sky' ? withoutType(lead) : NO_SKY,
     fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
+    seen: lead.type === 'marker-as-seen' ? lead.seen : null,
+    nature: lead.type === 'nature-sign' ? withoutType(lead) : NO_NATURE,
+    anchor: anchorPart(lead),
     lastDate: lastDate ?? NO_FIXED,
+    record: content.record ?? EMPTY_RECORD,
     sharing: content.sharing ?? PLAIN_DETAILS,
     giverId: content.giverId ?? null,
   };
@@ -55,11 +78,16 @@ export function hasSign({ spec }: EntryDraft['sky']): boolean {
 
 /** What would be saved. It may still be incomplete; the contract's schema says where. */
 export function contentOf(draft: EntryDraft): EntryInput {
-  const { leadType, marker, sky, fixed, lastDate, sharing, giverId, ...rest } = draft;
+  const { leadType, marker, sky, fixed, seen, nature, anchor, lastDate, sharing, giverId, record, ...rest } =
+    draft;
   const leads: Record<EntryLead['type'], EntryLead> = {
     marker: { type: 'marker', ...marker },
     sky: { type: 'sky', ...sky },
     'fixed-date': { type: 'fixed-date', ...fixed },
+    'marker-as-seen': { type: 'marker-as-seen', ...marker, seen },
+    'nature-sign': { type: 'nature-sign', ...nature },
+    'entry-planned': { type: 'entry-planned', ...anchor },
+    'entry-actual': { type: 'entry-actual', entryId: anchor.entryId },
   };
   return {
     ...rest,
@@ -68,6 +96,7 @@ export function contentOf(draft: EntryDraft): EntryInput {
     // Left out where they say nothing, so that older texts and their hashes stay as they are.
     ...(sharing && !sameJson(sharing, PLAIN_DETAILS) ? { sharing } : {}),
     ...(giverId ? { giverId } : {}),
+    ...(sameJson(record, EMPTY_RECORD) ? {} : { record }),
   };
 }
 
@@ -96,6 +125,7 @@ export function newDraft(wanted: WantedLead | null = null): EntryDraft {
     notes: '',
     caution: '',
     fixed: NO_FIXED,
+    ...NEWER_LEADS,
     offsets: FIRST_OFFSETS,
     hasLastDate: false,
     lastDate: NO_FIXED,
@@ -107,6 +137,7 @@ export function newDraft(wanted: WantedLead | null = null): EntryDraft {
     sharingLevel: 'village',
     sharing: PLAIN_DETAILS,
     giverId: null,
+    record: EMPTY_RECORD,
   };
 }
 
@@ -128,6 +159,15 @@ export function sameContent(a: EntryInput, b: EntryInput): boolean {
 function tidy(content: EntryInput): EntryInput {
   const parsed = entryInput.safeParse(content);
   return parsed.success ? parsed.data : content;
+}
+
+function markerOf({ markerKey, phenomenon, occurrence }: StarLead): EntryDraft['marker'] {
+  return { markerKey, phenomenon, occurrence };
+}
+
+function anchorPart(lead: EntryLead): EntryDraft['anchor'] {
+  if (lead.type === 'entry-planned') return withoutType(lead);
+  return lead.type === 'entry-actual' ? { ...NO_ANCHOR, entryId: lead.entryId } : NO_ANCHOR;
 }
 
 function withoutType<T extends { type: string }>({ type: _type, ...rest }: T): Omit<T, 'type'> {

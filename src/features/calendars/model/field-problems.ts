@@ -28,20 +28,22 @@ export function problemsFrom(errors: readonly FieldError[]): FieldProblems {
   return found;
 }
 
-export type FieldGroup = 'what' | 'when' | 'signs' | 'late' | 'whose';
+export type FieldGroup = 'what' | 'when' | 'signs' | 'work' | 'trust' | 'whose';
 
-const GROUPS: Record<FieldGroup, readonly (keyof EntryInput)[]> = {
-  what: ['titleVillage', 'titleOfficer', 'kind', 'icon', 'crop', 'notes', 'caution'],
-  when: ['board', 'lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch'],
-  signs: ['otherSigns'],
-  late: ['ifLate'],
-  whose: ['giver', 'giverId', 'agreedToPrint', 'sharingLevel', 'sharing'],
+/** Beginnings of the fields' paths. */
+const GROUPS: Record<FieldGroup, readonly string[]> = {
+  what: ['titleVillage', 'titleOfficer', 'kind', 'icon', 'crop', 'notes', 'caution', 'record.what'],
+  when: ['board', 'lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch', 'record.when'],
+  signs: ['otherSigns', 'record.signs'],
+  work: ['ifLate', 'record.work'],
+  trust: ['record.trust', 'record.checked'],
+  whose: ['giver', 'giverId', 'agreedToPrint', 'sharingLevel', 'sharing', 'record.heard'],
 };
 
 /** The groups that must open because something in them needs another look. */
 export function groupsWithProblems(problems: FieldProblems): FieldGroup[] {
-  const fields = [...problems.keys()].map((path) => path.split('.')[0]);
+  const paths = [...problems.keys()];
   return (Object.keys(GROUPS) as FieldGroup[]).filter((group) =>
-    GROUPS[group].some((field) => fields.includes(field)),
+    GROUPS[group].some((field) => paths.some((path) => path === field || path.startsWith(`${field}.`))),
   );
 }

@@ -2,7 +2,7 @@ import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { Language } from '#shared/contracts/people.js';
 import type { SkyMarkerYear } from '#shared/contracts/sky-markers.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
-import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import { dayNumberFromIso, dayNumberOf } from '#shared/kernel/iso-date.js';
 import { monthDay } from '#shared/contracts/common.js';
 import type { EntryDraft } from './entry-draft.js';
 import type { Markers } from './preview-dates.js';
@@ -29,15 +29,31 @@ export interface FormState {
   officerLanguage: Language | null;
   /** An elder's own entry: its first fields are few, and it is kept. */
   isKeepers: boolean;
+  /** Saved entries from whose days this one can be counted. */
+  others: readonly OtherEntry[];
+  /** Titles along the circle in which it would wait for itself. */
+  circle: readonly string[] | null;
+}
+
+export interface OtherEntry {
+  id: string;
+  title: string;
 }
 
 /** The star or figure that the entry goes by; null for a fixed date, or while none is chosen or known. */
 export function leadingRow({ draft, markers }: Pick<FormState, 'draft' | 'markers'>): MarkerRow | null {
-  return draft.leadType === 'marker' ? (markers?.get(draft.marker.markerKey) ?? null) : null;
+  return isByStar(draft) ? (markers?.get(draft.marker.markerKey) ?? null) : null;
+}
+
+/** Does the first or last day of a star lead, as computed or as seen? */
+export function isByStar({ leadType }: Pick<EntryDraft, 'leadType'>): boolean {
+  return leadType === 'marker' || leadType === 'marker-as-seen';
 }
 
 /** The day from which the four days are counted; null while there is none. */
-export function leadDayNumber(form: Pick<FormState, 'draft' | 'sign' | 'markers' | 'year'>): number | null {
+export function leadDayNumber(
+  form: Pick<FormState, 'draft' | 'sign' | 'markers' | 'year' | 'dates'>,
+): number | null {
   const { draft, year } = form;
   if (draft.leadType === 'fixed-date') {
     const { month, day } = draft.fixed.date;
@@ -45,6 +61,10 @@ export function leadDayNumber(form: Pick<FormState, 'draft' | 'sign' | 'markers'
   }
   if (draft.leadType === 'sky') {
     return form.sign?.occurrences[draft.sky.occurrence - 1]?.expected.dayNumber ?? null;
+  }
+  if (!isByStar(draft) || (draft.leadType === 'marker-as-seen' && draft.seen !== null)) {
+    const from = form.dates?.counted?.from ?? null;
+    return from === null ? null : dayNumberFromIso(from);
   }
   const row = leadingRow(form);
   if (row?.outcome !== 'rises-and-sets') return null;

@@ -1,8 +1,9 @@
 import { entryInput, entryLead, type EntryInput } from '#shared/contracts/calendars.js';
+import { EMPTY_RECORD } from '#shared/contracts/event-record.js';
 import { sharingDetails } from '#shared/contracts/sharing.js';
 import { forget, keep, readAllKept } from '#src/lib/device-storage.js';
 import { draftPrefix } from '#src/lib/kept-draft.js';
-import { hasSign, newDraft, type EntryDraft } from './entry-draft.js';
+import { hasSign, newDraft, NEWER_LEADS, type EntryDraft } from './entry-draft.js';
 
 /** Unsaved writing of one entry, and over which saved state of it. Both are null for a new entry. */
 export interface EntryEdit {
@@ -50,7 +51,9 @@ export function forgetEdit(personId: string, calendarId: string, entryId: string
 /** What another release kept may have another shape; it is then left alone rather than half read. */
 function readEdit(kept: unknown): EntryEdit | null {
   if (typeof kept !== 'object' || kept === null) return null;
-  const { draft, base, baseVersion, keptAt } = kept as Partial<Record<keyof EntryEdit, unknown>>;
+  const { draft: written, base, baseVersion, keptAt } = kept as Partial<Record<keyof EntryEdit, unknown>>;
+  // What was kept before there were these parts goes on with empty ones.
+  const draft = typeof written === 'object' ? { record: EMPTY_RECORD, ...NEWER_LEADS, ...written } : null;
   if (typeof keptAt !== 'string' || !(baseVersion === null || typeof baseVersion === 'number')) return null;
   if (!isDraft(draft)) return null;
   if (base !== null && !entryInput.safeParse(base).success) return null;
@@ -61,9 +64,9 @@ function isDraft(draft: unknown): draft is EntryDraft {
   if (typeof draft !== 'object' || draft === null || !('sky' in draft)) return false;
   const start = newDraft();
   // A sign of the sky has as many shapes as there are kinds, and a level as many details: the contract knows them.
-  const { sky, sharing, giverId } = start;
-  if (!sameShape({ ...draft, sky, sharing, giverId }, start)) return false;
-  if (!isSharingDraft(draft)) return false;
+  const { sky, sharing, giverId, record, seen } = start;
+  if (!sameShape({ ...draft, sky, sharing, giverId, record, seen }, start)) return false;
+  if (!isSharingDraft(draft) || !isRecordDraft(draft) || !isSeenDraft(draft)) return false;
   if (sameShape(draft.sky, start.sky) && !hasSign(draft.sky as EntryDraft['sky'])) return true;
   return entryLead.safeParse({ type: 'sky', ...(draft.sky as object) }).success;
 }
@@ -71,6 +74,19 @@ function isDraft(draft: unknown): draft is EntryDraft {
 function isSharingDraft(draft: object): boolean {
   const { sharing, giverId } = draft as { sharing?: unknown; giverId?: unknown };
   return sharingDetails.safeParse(sharing).success && (giverId === null || typeof giverId === 'string');
+}
+
+function isSeenDraft(draft: object): boolean {
+  const { seen } = draft as { seen?: unknown };
+  return seen === null || sameShape(seen, { date: '', by: '', agreedBy: '' });
+}
+
+/** Half-written members are the form's to name; only its groups must be there. */
+function isRecordDraft(draft: object): boolean {
+  const { record } = draft as { record?: unknown };
+  if (typeof record !== 'object' || record === null) return false;
+  const groups = Object.keys(EMPTY_RECORD);
+  return Object.keys(record).length === groups.length && groups.every((group) => group in record);
 }
 
 /** The same members of the same types, all the way down. */

@@ -1,5 +1,7 @@
 import { entryDatesFromDays, inOrder } from '#shared/calendar/entry-dates.js';
 import { overlappingEntryIds } from '#shared/calendar/overlap.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
+import { seenDay } from '#shared/contracts/entry-lead.js';
 import type { Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import { entryOffsets, fixedLastDate } from '#shared/contracts/calendars.js';
 import { monthDay } from '#shared/contracts/common.js';
@@ -29,6 +31,20 @@ export function previewDates(
   if (lead.type === 'sky') {
     const sign = signOf(signs, lead.spec);
     return sign && entryDatesFromDays(known, year, sign);
+  }
+  if (lead.type === 'nature-sign') {
+    const { from, to } = lead.usual;
+    const isWhole = monthDay.safeParse(from).success && monthDay.safeParse(to).success;
+    return isWhole ? entryDatesFromDays(known, year, null) : null;
+  }
+  // What is counted from another entry waits until all of them are at hand; see `shown-entries.ts`.
+  if (!isStarLead(lead)) return null;
+  if (
+    lead.type === 'marker-as-seen' &&
+    lead.seen !== null &&
+    !seenDay.shape.date.safeParse(lead.seen.date).success
+  ) {
+    return null;
   }
   const row = markers?.get(lead.markerKey);
   return row ? entryDatesFromDays(known, year, { ...row, year }) : null;

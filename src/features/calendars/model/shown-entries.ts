@@ -1,7 +1,9 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { Entry, EntryInput } from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
 import { isNewId, type Edits, type EntryEdit } from './kept-edits.js';
+import { withAnchors } from './hung-entries.js';
 import { previewDates, withOverlaps, type Markers, type ShownEntry } from './preview-dates.js';
 import { signOf, type Signs } from './signs.js';
 
@@ -39,11 +41,11 @@ export function shownEntries({
     const content = contentOf(edits.get(id)?.draft ?? newStart);
     return { id, saved: null, content, dates: datesOf(content, null), unsaved: edits.has(id) };
   });
-  return withOverlaps([...shown, ...added]);
+  return withOverlaps(withAnchors([...shown, ...added], year));
 
   /** While the sky is on its way, an entry that still goes by the same thing keeps its saved sign. */
   function datesOf(content: EntryInput, entry: Entry | null) {
-    if (markers === null && content.lead.type === 'marker') return entry?.dates ?? null;
+    if (markers === null && isStarLead(content.lead)) return entry?.dates ?? null;
     if (content.lead.type === 'sky' && signOf(signs, content.lead.spec) === null) {
       return entry && sameJson(entry.content.lead, content.lead) ? entry.dates : null;
     }

@@ -20,6 +20,7 @@ export const UNITS = {
   otherSigns: ['otherSigns'],
   ifLate: ['ifLate'],
   giver: ['giver'],
+  record: ['record'],
   agreedToPrint: ['agreedToPrint'],
   board: ['board'],
   sharingLevel: ['sharingLevel', 'sharing', 'giverId'],

@@ -1,3 +1,4 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryLead } from '#shared/contracts/calendars.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
@@ -7,15 +8,15 @@ import type { Markers, ShownEntry } from './preview-dates.js';
 
 /** Keys of lanes: stars by their own, signs of the sky by their text. */
 export function laneKeyOf(lead: EntryLead): string | null {
-  if (lead.type === 'fixed-date') return null;
-  return lead.type === 'marker' ? lead.markerKey : canonicalJson(lead.spec);
+  if (isStarLead(lead)) return lead.markerKey;
+  return lead.type === 'sky' ? canonicalJson(lead.spec) : null;
 }
 
 /** The stars and figures that entries go by, each once, in the order in which the entries bring them. */
 export function lanesOf(entries: readonly ShownEntry[], markers: Markers | null): MarkerRow[] {
   const rows = new Map<string, MarkerRow>();
   for (const { content } of entries) {
-    if (content.lead.type !== 'marker') continue;
+    if (!isStarLead(content.lead)) continue;
     const row = markers?.get(content.lead.markerKey);
     if (row) rows.set(row.markerKey, row);
   }

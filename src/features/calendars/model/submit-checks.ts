@@ -1,3 +1,5 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
+import { signOffNeeds, type SignOffNeed } from '#shared/calendar/sign-off-needs.js';
 import type { Community } from '#shared/contracts/people.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import type { ShownEntry } from './preview-dates.js';
@@ -13,6 +15,10 @@ export interface SubmitChecks {
   remarked: ShownEntry[];
   /** Farm work that does not say what to do if it is late. */
   withoutLate: ShownEntry[];
+  /** With a record that does not say everything yet: the server refuses a submission with them. */
+  incomplete: { entry: ShownEntry; needs: SignOffNeed[] }[];
+  /** Written before there were records: they go out as they are. */
+  withoutRecord: ShownEntry[];
   entryCount: number;
   markerCount: number;
 }
@@ -30,11 +36,11 @@ export function submitChecks(
   if (community?.agricultureContact === '') missing.push('no-agriculture');
   const markers = new Set(
     saved.flatMap(({ saved: { content } }) =>
-      content.lead.type === 'fixed-date'
-        ? []
-        : content.lead.type === 'marker'
-          ? [content.lead.markerKey]
-          : [canonicalJson(content.lead.spec)],
+      isStarLead(content.lead)
+        ? [content.lead.markerKey]
+        : content.lead.type === 'sky'
+          ? [canonicalJson(content.lead.spec)]
+          : [],
     ),
   );
   return {
@@ -42,6 +48,10 @@ export function submitChecks(
     unsaved: shown.filter((entry) => entry.unsaved),
     remarked: saved.filter((entry) => entry.saved.dates.warnings.length > 0),
     withoutLate: saved.filter(({ saved: { content } }) => content.kind === 'farm' && content.ifLate === ''),
+    incomplete: saved
+      .map((entry) => ({ entry, needs: signOffNeeds(entry.saved.content) }))
+      .filter(({ needs }) => needs.length > 0),
+    withoutRecord: saved.filter(({ saved: { content } }) => content.record === undefined),
     entryCount: saved.length,
     markerCount: markers.size,
   };

@@ -9,7 +9,14 @@ import type { ShownEntry } from './preview-dates.js';
 export type Way =
   | {
       kind:
-        'otherStar' | 'otherSign' | 'useFirst' | 'changeDays' | 'changeLastDate' | 'writeSigns' | 'fixedDate';
+        | 'byPlanned'
+        | 'otherStar'
+        | 'otherSign'
+        | 'useFirst'
+        | 'changeDays'
+        | 'changeLastDate'
+        | 'writeSigns'
+        | 'fixedDate';
     }
   | { kind: 'otherDay'; phenomenon: Phenomenon };
 
@@ -35,7 +42,12 @@ export function waysOut(warning: EntryWarning, draft: EntryDraft, row: MarkerRow
     case 'belief-not-agreed-to-print':
       return [];
     case 'windows-overlap':
+    case 'anchor-without-days':
       return [{ kind: 'changeDays' }];
+    case 'anchor-gone':
+      return [{ kind: 'changeDays' }, { kind: 'fixedDate' }];
+    case 'waits-for-actual-day':
+      return [{ kind: 'byPlanned' }];
   }
 }
 

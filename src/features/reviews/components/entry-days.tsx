@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next';
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryDates, EntryInput, EntryWindow } from '#shared/contracts/calendars.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { dateOfDayNumber, dayNumberOf, readDate } from '#src/lib/days.js';
@@ -54,7 +55,7 @@ export function EntryDays({
 }
 
 function rangeOf({ marker }: EntryDates, { lead }: EntryInput): RangeMark | null {
-  if (marker === null || lead.type === 'fixed-date') return null;
+  if (marker === null || (lead.type !== 'sky' && !isStarLead(lead))) return null;
   return {
     key: 'range',
     early: marker.early?.dayNumber ?? null,

@@ -5,6 +5,7 @@ import { KeptChip } from '#src/lib/level-chip.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { RecordReading } from '#src/lib/record-reading.js';
 import { VariantList } from '#src/lib/variant-list.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { Care } from '#src/ui/surfaces.js';
@@ -55,7 +56,7 @@ export function EntryView({
       </p>
       <ReadAloud
         language={header.officerLanguage.tag}
-        sentences={[content.titleOfficer, best, say.lead, say.begins, say.lastAdvised]
+        sentences={[content.titleOfficer, best, say.lead, say.counted, say.begins, say.lastAdvised]
           .concat(content.protectiveWatch ? t('watch') : null)
           .concat(
             spoken(t('signs'), content.otherSigns),
@@ -84,12 +85,14 @@ export function EntryView({
         )}
       </p>
       <p>{say.lead}</p>
+      {say.counted !== null && <p>{say.counted}</p>}
       {say.begins !== null && <p>{say.begins}</p>}
       {window !== null && <EntryDays window={window} dates={dates} content={content} />}
       {say.lastAdvised !== null && <p>{say.lastAdvised}</p>}
       {content.protectiveWatch && <p>{t('watch')}</p>}
       <Part title={t('signs')} text={content.otherSigns} />
       <Part title={t('ifLate')} text={content.ifLate} />
+      <RecordReading record={content.record} />
       <Part title={t('crop')} text={content.crop} />
       <Part title={t('notes')} text={content.notes} />
       {entry.variants !== undefined && (

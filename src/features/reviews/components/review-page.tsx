@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
 import { versionQuery } from '#src/lib/calendar-queries.js';
+import { EntryTitles, titlesOf } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -21,7 +22,11 @@ export function ReviewPage({ about, speak }: { about: About; speak: SpeakAbout }
   usePageTitle(t('title', { year: version.data?.header.year ?? '' }));
 
   if (version.data && answers.data) {
-    return <ReviewRound version={version.data} answers={answers.data} about={about} speak={speak} />;
+    return (
+      <EntryTitles titles={titlesOf(version.data.entries)}>
+        <ReviewRound version={version.data} answers={answers.data} about={about} speak={speak} />
+      </EntryTitles>
+    );
   }
   const trouble = version.error ?? answers.error;
   return (

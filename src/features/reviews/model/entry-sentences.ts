@@ -4,8 +4,13 @@ import type { FrozenMarker, VersionEntryBody } from '#shared/contracts/versions.
 import { skyMarkerTimeOf } from '#shared/sky/vocabulary.js';
 import { useDateWords, type DateWords } from '#src/lib/date-words.js';
 import { markerName } from '#src/lib/marker-names.js';
+import { isStarLead } from '#shared/calendar/entry-model.js';
+import { useCountedWords } from '#src/lib/counted-words.js';
+import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
 import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { endOfNight } from '#src/lib/sky-words.js';
+
+const NO_NAMES: NamesByKey = new Map();
 
 export interface EntrySentences {
   /** When the star comes, or why there is no day; or which fixed date leads. */
@@ -13,6 +18,8 @@ export interface EntrySentences {
   /** How many days after it the work begins; null without a window. */
   begins: string | null;
   lastAdvised: string | null;
+  /** From which days it is counted, where no computed day and no fixed date leads. */
+  counted: string | null;
 }
 
 /** An entry's timing in whole sentences, without a bare date. */
@@ -24,6 +31,8 @@ export function useEntrySentences(
   const { t } = useTranslation(['reviews', 'sky']);
   const words = useDateWords();
   const sign = useSkySignWords();
+  const leadWords = useEntryWords();
+  const counted = useCountedWords();
   const { lead, offsets } = content;
   const { window } = dates;
 
@@ -45,6 +54,7 @@ export function useEntrySentences(
         between: rangeWords(dates.marker, words),
       });
     }
+    if (!isStarLead(lead)) return leadWords.leadAlone(content, NO_NAMES);
     const found = markers.find(({ markerKey }) => markerKey === lead.markerKey);
     const marker = found ? markerName(found) : lead.markerKey;
     const phenomenon = t(`sky:phenomenon.${lead.phenomenon}`);
@@ -70,7 +80,8 @@ export function useEntrySentences(
 
   return {
     lead: leadSentence(),
-    begins: window === null || lead.type === 'fixed-date' ? null : begins(),
+    counted: dates.counted === undefined ? null : counted(dates.counted),
+    begins: window === null || lead.type === 'fixed-date' || dates.counted !== undefined ? null : begins(),
     lastAdvised:
       window === null
         ? null

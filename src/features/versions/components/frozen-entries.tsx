@@ -105,7 +105,7 @@ function BesideIt({ entry, year, markers }: { entry: VersionEntry; year: number;
   );
 }
 
-const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'late', 'whose'];
+const GROUPS: readonly FactGroup[] = ['what', 'when', 'signs', 'work', 'trust', 'whose'];
 
 function EntryRest({ entry, year, markers }: { entry: VersionEntry; year: number; markers: NamesByKey }) {
   const { t } = useTranslation('versions');

@@ -1,3 +1,4 @@
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { boardOf } from '#shared/calendar/variants.js';
@@ -77,7 +78,7 @@ export function FrozenStrip({ version }: { version: Version }) {
  * that is named by a sign of the sky only has that sign's lane.
  */
 function starLanesOf({ header, entries }: Version): FrozenMarker[] {
-  const keys = entries.flatMap(({ content: { lead } }) => (lead.type === 'marker' ? [lead.markerKey] : []));
+  const keys = entries.flatMap(({ content: { lead } }) => (isStarLead(lead) ? [lead.markerKey] : []));
   return header.markers
     .filter(({ markerKey }) => keys.includes(markerKey))
     .sort((a, b) => keys.indexOf(a.markerKey) - keys.indexOf(b.markerKey));

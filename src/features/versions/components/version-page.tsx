@@ -12,6 +12,7 @@ import {
 } from '#shared/contracts/versions.js';
 import { calendarQuery, versionQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { EntryTitles, titlesOf } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
 import { ButtonLink } from '#src/ui/button.js';
@@ -77,7 +78,9 @@ function FrozenVersion({ calendarId, number, review, about }: FrozenVersionProps
       {review !== undefined && <div className="mb-4">{review(version)}</div>}
       <FrozenStrip version={version} />
       <Columns wider="first">
-        <FrozenEntries version={version} about={about} />
+        <EntryTitles titles={titlesOf(version.entries)}>
+          <FrozenEntries version={version} about={about} />
+        </EntryTitles>
         <div className="grid gap-4">
           {isOpen && <SignaturesBoard version={version} />}
           <BasisBoard header={version.header} />

@@ -1,4 +1,5 @@
 import type { ParseKeys } from 'i18next';
+import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput, EntryLead, FixedLastDate } from '#shared/contracts/calendars.js';
 import type { OccurrenceDays } from '#shared/contracts/stars.js';
 import type { EntryComparison, VersionEntryBody } from '#shared/contracts/versions.js';
@@ -31,7 +32,7 @@ export interface CompareWords {
   about: (days: OccurrenceDays) => string;
   lead: (lead: EntryLead) => string;
   /** The star or sign alone, without its phenomenon. */
-  signName: (lead: Exclude<EntryLead, { type: 'fixed-date' }>) => string;
+  signName: (lead: Extract<EntryLead, { type: 'marker' | 'marker-as-seen' | 'sky' }>) => string;
   lastDate: (lastDate: FixedLastDate) => string;
   kind: (kind: EntryInput['kind']) => string;
   icon: (icon: EntryInput['icon']) => string;
@@ -107,7 +108,7 @@ function leadSentences(before: VersionEntryBody, after: VersionEntryBody, words:
   }
   const wasDays = before.dates.marker;
   const isDays = after.dates.marker;
-  if (is.type === 'fixed-date' || !wasDays || !isDays || sameJson(wasDays, isDays)) return [];
+  if ((is.type !== 'sky' && !isStarLead(is)) || !wasDays || !isDays || sameJson(wasDays, isDays)) return [];
   const days = isDays.expected.dayNumber - wasDays.expected.dayNumber;
   const marker = words.signName(is);
   if (days === 0) {
@@ -164,6 +165,10 @@ function wordSentences(before: EntryInput, after: EntryInput, words: CompareWord
   tell('sentence.kind', words.kind(before.kind), words.kind(after.kind));
   tell('sentence.icon', words.icon(before.icon), words.icon(after.icon));
   tell('sentence.level', words.level(before.sharingLevel), words.level(after.sharingLevel));
+  if (!sameJson(before.record ?? null, after.record ?? null)) {
+    const change = before.record === undefined ? 'added' : after.record === undefined ? 'removed' : 'changed';
+    sentences.push({ key: `sentence.record.${change}`, values: {} });
+  }
   if (before.agreedToPrint !== after.agreedToPrint) {
     sentences.push({ key: after.agreedToPrint ? 'sentence.agreedNew' : 'sentence.agreedGone', values: {} });
   }

@@ -148,7 +148,7 @@ describe('the editor', () => {
     const saved = draft({ ifLate: 'Sow beans.' });
     const log = answerWith(server(saved));
     const { user } = await open();
-    await user.click(await screen.findByText('If late'));
+    await user.click(await screen.findByText('Do'));
     const late = screen.getByLabelText('What to do if it is late');
     await user.clear(late);
     await user.type(late, 'Ask the office.');

@@ -1,0 +1,124 @@
+/**
+ * What an event's record must say before elders are asked about it. A draft may lack any of it; which parts are asked for
+ * depends on the kind of the event. The codes have words in every language.
+ */
+export const SIGN_OFF_NEEDS = [
+  'titleVillage',
+  'operation',
+  'crop',
+  'land',
+  'leadDays',
+  'graceDays',
+  'signsNeeded',
+  'mustHaveSign',
+  'responsible',
+  'decides',
+  'ifEarly',
+  'ifLate',
+  'stop',
+  'askWhom',
+  'caution',
+  'confidence',
+  'confidenceBy',
+  'basis',
+  'giver',
+  'heardWhere',
+  'heardDay',
+  'heardLanguage',
+  'checkedWork',
+  'checkedSafety',
+  'checkedLate',
+] as const;
+export type SignOffNeed = (typeof SIGN_OFF_NEEDS)[number];
+
+/** The part of an entry that these rules look at. */
+export interface NeedsOfEntry {
+  kind: string;
+  titleVillage: string;
+  crop: string;
+  caution: string;
+  ifLate: string;
+  giver: string;
+  /** Whoever does not want to be named is not asked for a name. */
+  sharing?: { naming: string } | undefined;
+  record?: NeedsOfRecord | undefined;
+}
+
+export interface NeedsOfRecord {
+  what: { operation: string | null; land: string };
+  when: { leadDays: number | null; graceDays: number | null };
+  signs: { needed: number | null; mustHave: number | null };
+  work: { responsible: string; decides: string; ifEarly: string; stop: object | null; askWhom: string };
+  trust: { confidence: string | null; by: string; basis: string | null };
+  heard: { where: string; day: string | null; language: string };
+  checked: { work: object | null; safety: object | null; late: object | null };
+}
+
+/** Seed that is in the ground cannot be taken back: signs decide, not a day alone. */
+const INTO_THE_GROUND: readonly (string | null)[] = ['sow', 'plant', 'gap-fill'];
+
+/**
+ * What is still to be said, in the order of the form. Empty where nothing is missing, and for entries without a record: they
+ * were written before there was one, and go on as they did.
+ */
+export function signOffNeeds(entry: NeedsOfEntry): SignOffNeed[] {
+  const { record } = entry;
+  if (record === undefined) return [];
+  const missing = new Set<SignOffNeed>(missingOfWhose(entry, record));
+  if (entry.kind !== 'marker-only') {
+    for (const need of missingOfWork(entry, record)) missing.add(need);
+  }
+  if (entry.kind === 'farm') for (const need of missingOfFarm(entry, record)) missing.add(need);
+  if (entry.kind === 'safety' && entry.caution === '') missing.add('caution');
+  for (const need of missingOfCheck(entry, record)) missing.add(need);
+  return SIGN_OFF_NEEDS.filter((need) => missing.has(need));
+}
+
+function missingOfWhose(
+  { titleVillage, giver, sharing }: NeedsOfEntry,
+  { trust, heard }: NeedsOfRecord,
+): SignOffNeed[] {
+  const isNamed = (sharing?.naming ?? 'named') === 'named';
+  return unsaid({
+    titleVillage,
+    ...(isNamed ? { giver, confidenceBy: trust.by } : {}),
+    confidence: trust.confidence,
+    basis: trust.basis,
+    heardWhere: heard.where,
+    heardDay: heard.day,
+    heardLanguage: heard.language,
+  });
+}
+
+function missingOfWork({ kind, ifLate }: NeedsOfEntry, { when, work }: NeedsOfRecord) {
+  const { leadDays, graceDays } = when;
+  const { responsible, decides, askWhom, stop, ifEarly } = work;
+  const canHurt = kind === 'farm' || kind === 'safety';
+  return unsaid({
+    ...{ leadDays, graceDays, responsible, decides },
+    ...(canHurt ? { ifEarly, ifLate, stop, askWhom } : {}),
+  });
+}
+
+function missingOfFarm({ crop }: NeedsOfEntry, { what, signs }: NeedsOfRecord) {
+  const { operation, land } = what;
+  const waits = INTO_THE_GROUND.includes(operation);
+  return unsaid({
+    ...{ operation, crop, land },
+    ...(waits ? { signsNeeded: signs.needed, mustHaveSign: signs.mustHave } : {}),
+  });
+}
+
+/** Words on which somebody may act and be hurt were read by the responsible office. */
+function missingOfCheck({ kind, caution, ifLate }: NeedsOfEntry, { checked }: NeedsOfRecord) {
+  return unsaid({
+    ...(kind === 'farm' ? { checkedWork: checked.work } : {}),
+    ...(caution === '' ? {} : { checkedSafety: checked.safety }),
+    ...(ifLate === '' ? {} : { checkedLate: checked.late }),
+  });
+}
+
+function unsaid(parts: Partial<Record<SignOffNeed, unknown>>): SignOffNeed[] {
+  const empty = Object.entries(parts).filter(([, said]) => said === null || said === '');
+  return empty.map(([need]) => need as SignOffNeed);
+}

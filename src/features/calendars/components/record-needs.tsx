@@ -1,0 +1,26 @@
+import { useTranslation } from 'react-i18next';
+import { signOffNeeds } from '#shared/calendar/sign-off-needs.js';
+import type { EntryInput } from '#shared/contracts/calendars.js';
+import { Well } from '#src/ui/surfaces.js';
+
+/** What the entry still has to say before elders are asked about it. Nothing of it keeps a draft from being saved. */
+export function RecordNeeds({ content }: { content: EntryInput }) {
+  const { t } = useTranslation('record');
+  const needs = signOffNeeds(content);
+  if (content.record === undefined)
+    return <p className="mt-3 text-small text-umber-soft">{t('needs.hint')}</p>;
+  if (needs.length === 0) return null;
+  return (
+    <Well className="mt-3">
+      <p>
+        <strong>{t('needs.title', { count: needs.length })}</strong>
+      </p>
+      <ul className="list-disc ps-6">
+        {needs.map((need) => (
+          <li key={need}>{t(`needs.need.${need}`)}</li>
+        ))}
+      </ul>
+      <p className="text-small text-umber-soft">{t('needs.draft')}</p>
+    </Well>
+  );
+}

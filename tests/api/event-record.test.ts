@@ -1,0 +1,90 @@
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import type { Calendar } from '#shared/contracts/calendars.js';
+import type { Problem } from '#shared/contracts/problem.js';
+import { openTestApi, type TestApi } from '#tests/support/api.js';
+import {
+  addEntry,
+  beginCalendar,
+  entriesOf,
+  entryInput,
+  openVillage,
+  readVersion,
+  reasonOf,
+  submit,
+  type Village,
+} from '#tests/support/calendar-api.js';
+import { wholeRecord } from '#tests/support/event-record.js';
+import { details } from '#tests/support/sharing-api.js';
+
+let api: TestApi;
+let village: Village;
+let calendar: Calendar;
+beforeAll(async () => {
+  api = await openTestApi();
+});
+beforeEach(async () => {
+  await api.reset();
+  village = await openVillage(api);
+  calendar = await beginCalendar(village);
+});
+afterAll(() => api.close());
+
+/** Of sowing, with everything that is asked for before elders are. */
+const whole = () => ({ record: wholeRecord(), giver: 'Elder A-1', ifLate: 'Sow short millet.' });
+
+describe('the record of an event', () => {
+  it('is saved with a draft however little it says, and frozen with a submission as it is', async () => {
+    const { officer } = village;
+    const entry = await addEntry(officer, calendar.id, whole());
+    expect(entry.content.record).toEqual(wholeRecord());
+    const version = await submit(officer, calendar.id);
+    const frozen = await readVersion(village.elder, version);
+    expect(frozen.entries[0]?.content.record).toEqual(wholeRecord());
+  });
+
+  it('names at its field what cannot be, and keeps nothing', async () => {
+    const signs = { ...wholeRecord().signs, needed: 5 };
+    const answer = await village.officer
+      .post(
+        `/api/calendars/${calendar.id}/entries`,
+        entryInput({ ...whole(), record: wholeRecord({ signs }) }),
+      )
+      .expect(422);
+    expect((answer.body as Problem).errors).toMatchObject([
+      { field: 'record.signs.needed', code: 'signs-needed' },
+    ]);
+    expect(await entriesOf(village.officer, calendar.id)).toEqual([]);
+  });
+
+  it('that is begun and not whole keeps the submission back, and names its entry', async () => {
+    const { officer } = village;
+    await addEntry(officer, calendar.id, { ...whole(), titleOfficer: 'Sow beans', ifLate: '' });
+    await addEntry(officer, calendar.id, { titleOfficer: 'Older, without a record' });
+    const answer = await officer.post(`/api/calendars/${calendar.id}/versions`);
+    expect(reasonOf(answer)).toBe('409 record-incomplete');
+    expect((answer.body as Problem).names).toEqual(['Sow beans']);
+  });
+
+  it('of an entry that its people keep is theirs: it keeps nothing back and is not told of', async () => {
+    const { officer, elder } = village;
+    await addEntry(officer, calendar.id);
+    const kept = { ...whole(), ifLate: '', sharingLevel: 'elders' as const };
+    await addEntry(elder, calendar.id, kept);
+    await submit(officer, calendar.id);
+  });
+
+  it('does not name a giver who does not want to be named, and loses nothing by being written over', async () => {
+    const { officer, elder } = village;
+    const entry = await addEntry(officer, calendar.id, {
+      ...whole(),
+      giverId: elder.personId,
+      sharing: details({ naming: 'not-named' }),
+    });
+    expect(entry.content.record?.trust.by).toBe('');
+    const path = `/api/calendars/${calendar.id}/entries/${entry.id}`;
+    const content = { ...entry.content, notes: 'Told again' };
+    await officer.put(path, { content, version: 1 }).expect(200);
+    const [own] = await entriesOf(elder, calendar.id);
+    expect(own).toMatchObject({ content: { notes: 'Told again', record: { trust: { by: 'Elder A-1' } } } });
+  });
+});
