@@ -25,6 +25,8 @@ import { consentsRoutes } from './features/consents/consents.routes.js';
 import { ConsentsService } from './features/consents/consents.service.js';
 import { driftRoutes } from './features/drift/drift.routes.js';
 import { DriftService } from './features/drift/drift.service.js';
+import { exportsRoutes } from './features/exports/exports.routes.js';
+import { ExportsService } from './features/exports/exports.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
@@ -249,6 +251,7 @@ export function createApp(options: AppOptions): App {
   );
   const readBack = new ReadBackService(dataSource, contents, clock);
   sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
+  exportsRoutes(mount, new ExportsService(contents));
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

@@ -102,6 +102,8 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   listAnswers: { answer: keptSeen },
   printSheet: BOARD,
   previewSheet: BOARD,
+  // Who says yes here says it to every use, so files to take along hold what the board holds.
+  exportCalendarIcs: BOARD,
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,
   readAttachment: TITLED_FILES,

@@ -7,6 +7,7 @@ import { calendarsEndpoints } from './calendars.js';
 import { consentsEndpoints } from './consents.js';
 import { cardsEndpoints } from './cards.js';
 import { driftEndpoints } from './drift.js';
+import { exportsEndpoints } from './exports.js';
 import { finderEndpoints } from './finder.js';
 import { figuresEndpoints } from './figures.js';
 import { healthEndpoints } from './health.js';
@@ -57,6 +58,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   meetingsEndpoints,
   attachmentsEndpoints,
   sheetsEndpoints,
+  exportsEndpoints,
   sharingEndpoints,
   notesEndpoints,
   withdrawalsEndpoints,

@@ -21,6 +21,10 @@ export async function textOf(
   path: string,
   { fileType }: Pick<Endpoint, 'fileType'>,
 ): Promise<string> {
+  if (fileType === 'text/calendar') {
+    // Long lines go on in the next one behind a space.
+    return (await client.get(path)).text.replaceAll('\r\n ', '');
+  }
   if (fileType !== 'application/pdf') {
     const { text, body } = (await client.get(path)) as { text: string; body: unknown };
     return Buffer.isBuffer(body) ? body.toString('latin1') : text;

@@ -1,4 +1,5 @@
 import { wasPublished } from '#shared/calendar/version-state.js';
+import type { ConsentUse } from '#shared/contracts/consents.js';
 import type {
   SeenVariant,
   VersionEntry,
@@ -76,11 +77,21 @@ export class FrozenContentService {
 
   /** For the village's board: open and the village's entries that were agreed to be printed, whoever prints it. */
   async readForBoard(actor: Actor, calendarId: string, number: string): Promise<CalendarContent> {
+    return this.readForUse(actor, calendarId, number, 'print');
+  }
+
+  /** Open and the village's entries that were agreed to be used so, whoever takes them along. */
+  async readForUse(
+    actor: Actor,
+    calendarId: string,
+    number: string,
+    use: ConsentUse,
+  ): Promise<CalendarContent> {
     const { manager } = this.dataSource;
     const content = await this.read(actor, calendarId, number);
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const shown = await entriesForVillage(manager, viewer, content.entries);
-    const entries = await entriesForUse(manager, viewer.today, 'print', shown);
+    const entries = await entriesForUse(manager, viewer.today, use, shown);
     return { ...content, header: cutHeader(content.header, entries).header, entries };
   }
 

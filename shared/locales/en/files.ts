@@ -120,6 +120,21 @@ export const texts = {
     cautionText:
       'Computed evenings do not replace looking: air, hills and eyes can move a sighting by an evening, and communities may follow their own witnesses. Never look at the Sun.',
   },
+  ics: {
+    fileName: '{{community}} {{issue}} calendar',
+    name: '{{community}} {{issue}}',
+    about: 'Calendar of {{community}} for {{place}}, {{year}}, {{issue}}.',
+    state: {
+      draft: 'draft',
+      'in-review': 'in review',
+      'changes-asked': 'changes asked',
+      'signed-off': 'signed off, not published',
+      published: 'published',
+      replaced: 'replaced',
+      recalled: 'recalled',
+    },
+    early: 'Early days from {{date}}.',
+  },
   sheet: {
     fileName: {
       'month-cards': '{{community}} {{issue}} month cards',

@@ -1,0 +1,30 @@
+import type { IcsQuery } from '#shared/contracts/exports.js';
+import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
+import type { Actor } from '../../http/actor.js';
+import { fileNameOf } from '../../print/file-name.js';
+import { translatorFor } from '../../print/translator.js';
+import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
+import { calendarIcs } from './calendar-ics.js';
+
+interface ExportedFile {
+  content: string;
+  fileName: string;
+}
+
+/** Files to take along. They hold what the village's board may hold and what was agreed to be put into calendars. */
+export class ExportsService {
+  constructor(private readonly contents: FrozenContentService) {}
+
+  async ics(actor: Actor, calendarId: string, number: string, query: IcsQuery): Promise<ExportedFile> {
+    const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
+    return { content: calendarIcs(content, query.alarmDays ?? null), fileName: nameOf(content, 'ics') };
+  }
+}
+
+/** `Upper Tazimel 2027-1 calendar.ics`; what is not published says so in its name. */
+function nameOf({ header, label, state }: CalendarContent, extension: string): string {
+  const t = translatorFor(DEFAULT_LANGUAGE, 'files');
+  const published = state === 'published' ? label : null;
+  const issue = published ?? [String(header.year), t(`ics.state.${state ?? 'draft'}`)].join(' ');
+  return fileNameOf(t('ics.fileName', { community: header.communityName, issue }), extension);
+}

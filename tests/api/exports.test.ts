@@ -1,0 +1,127 @@
+import ICAL from 'ical.js';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Entry } from '#shared/contracts/calendars.js';
+import type { Version } from '#shared/contracts/versions.js';
+import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import {
+  addEntry,
+  beginCalendar,
+  openVillage,
+  publishDraft,
+  type Village,
+} from '#tests/support/calendar-api.js';
+import { addConsent } from '#tests/support/consent-api.js';
+
+/** What leaves the calendar as a file, read by other people's parsers. */
+let api: TestApi;
+let village: Village;
+let staff: Client;
+let calendarId: string;
+let published: Version;
+let sow: Entry;
+let watch: Entry;
+beforeAll(async () => {
+  api = await openTestApi();
+  village = await openVillage(api);
+  staff = await api.signIn('staff');
+  const { officer, elder } = village;
+  calendarId = (await beginCalendar(village)).id;
+  sow = await addEntry(officer, calendarId, {
+    titleOfficer: '=Sow; long, millet\\',
+    caution: 'Mind the seed,\nand the dog; always',
+    ifLate: '-5',
+    otherSigns: 'ŋɔ́rɛ̃ ɓèŋu '.repeat(20).trim(),
+  });
+  watch = await addEntry(officer, calendarId, {
+    titleOfficer: 'Watch over the year’s end',
+    kind: 'safety',
+    protectiveWatch: true,
+    lead: { type: 'fixed-date', date: { month: 12, day: 28 }, source: 'Water committee' },
+    offsets: { earliestDays: 0, bestFromDays: 1, bestToDays: 7, lastAdvisedDays: 9 },
+  });
+  const noFeed = await addEntry(officer, calendarId, { titleOfficer: 'Not for telephones' });
+  await addConsent(officer, 'entry', noFeed.id, { uses: ['keep', 'show', 'print'] });
+  await addEntry(elder, calendarId, { titleOfficer: 'Of the elders', sharingLevel: 'elders' });
+  published = await publishDraft(village, calendarId);
+  await addEntry(officer, calendarId, { titleOfficer: 'Later in the draft' });
+}, 60_000);
+afterAll(() => api.close());
+
+const path = (number: string | number, file: string) =>
+  `/api/calendars/${calendarId}/versions/${number}/${file}`;
+const textOf = async (client: Client, number: string | number, file: string) =>
+  (await client.get(path(number, file)).expect(200)).text;
+
+describe('iCalendar', () => {
+  const parsed = (text: string) => new ICAL.Component(ICAL.parse(text) as unknown[]);
+  const eventsOf = (text: string) =>
+    parsed(text)
+      .getAllSubcomponents('vevent')
+      .map((component) => new ICAL.Event(component));
+  const event = (text: string, { id }: Entry) => {
+    const found = eventsOf(text).find(({ uid }) => uid.startsWith(id));
+    if (found === undefined) throw new Error('The entry is not in the file.');
+    return found;
+  };
+
+  it('is read by another program: whole days from best to best, the end after the last of them', async () => {
+    const answer = await staff.get(path(published.number, 'calendar.ics')).expect(200);
+    expect(answer.headers['content-type']).toBe('text/calendar; charset=utf-8');
+    const read = event(answer.text, sow);
+    const { window } = sow.dates;
+    expect(read.startDate.isDate).toBe(true);
+    expect(read.startDate.toString()).toBe(window?.bestFrom);
+    const last = read.endDate.clone();
+    last.addDuration(ICAL.Duration.fromString('-P1D'));
+    expect(last.toString()).toBe(window?.bestTo);
+    expect(read.summary).toBe(`${sow.content.titleVillage} · =Sow; long, millet\\`);
+    expect(read.description).toContain('Mind the seed,\nand the dog; always');
+    expect(read.description).toContain(sow.content.otherSigns);
+    expect(read.component.getFirstPropertyValue('categories')).toBe('Farm work');
+  });
+
+  it('has the day of the marker once, with its range in words and the caution for eyes', async () => {
+    const text = await textOf(staff, published.number, 'calendar.ics');
+    const signs = eventsOf(text).filter(({ uid }) => uid.startsWith('sign-'));
+    expect(signs).toHaveLength(1);
+    expect(signs[0]?.startDate.toString()).toBe(sow.dates.marker?.expected.gregorian);
+    expect(signs[0]?.description).toMatch(/about \d+\sJune \(.+\)\.\n.*stop before the Sun shows/su);
+  });
+
+  it('goes over the end of the year', async () => {
+    const read = event(await textOf(staff, published.number, 'calendar.ics'), watch);
+    expect([read.startDate.toString(), read.endDate.toString()]).toEqual(['2027-12-29', '2028-01-05']);
+  });
+
+  it('ends every line with CRLF and folds at 75 octets', async () => {
+    const text = await textOf(staff, published.number, 'calendar.ics');
+    expect(text.replaceAll('\r\n', '')).not.toMatch(/[\r\n]/u);
+    expect(Math.max(...text.split('\r\n').map((line) => Buffer.byteLength(line)))).toBeLessThanOrEqual(75);
+  });
+
+  it('keeps the UID of a thing and raises SEQUENCE with the version; the draft is tentative', async () => {
+    const now = event(await textOf(village.officer, published.number, 'calendar.ics'), sow);
+    const draft = event(await textOf(village.officer, 'draft', 'calendar.ics'), sow);
+    expect(draft.uid).toBe(now.uid);
+    expect(draft.sequence).toBeGreaterThan(now.sequence);
+    const status = ({ component }: ICAL.Event) => component.getFirstPropertyValue('status');
+    expect([status(now), status(draft)]).toEqual(['CONFIRMED', 'TENTATIVE']);
+    await staff.get(path('draft', 'calendar.ics')).expect(404);
+  });
+
+  it('reminds nobody unless asked to, and then as many days ahead', async () => {
+    expect(await textOf(staff, published.number, 'calendar.ics')).not.toContain('VALARM');
+    const asked = event(await textOf(staff, published.number, 'calendar.ics?alarmDays=3'), sow);
+    const [alarm] = asked.component.getAllSubcomponents('valarm');
+    expect(String(alarm?.getFirstPropertyValue('trigger'))).toBe('-P3D');
+    const refused = await staff.get(path(published.number, 'calendar.ics?alarmDays=61')).expect(422);
+    expect(refused.body).toMatchObject({ type: '/problems/invalid-input' });
+  });
+
+  it('holds nothing above the village, whoever asks, and nothing that was not agreed for it', async () => {
+    for (const client of [village.elder, village.officer, staff]) {
+      const text = await textOf(client, published.number, 'calendar.ics');
+      expect(text).not.toMatch(/Of the elders|Not for telephones/u);
+    }
+  });
+});
