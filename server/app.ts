@@ -231,7 +231,6 @@ export function createApp(options: AppOptions): App {
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
   notesRoutes(mount, new NotesService(dataSource, clock));
-  actualDaysRoutes(mount, new ActualDaysService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
@@ -255,7 +254,10 @@ export function createApp(options: AppOptions): App {
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);
-  todayRoutes(mount, new TodayService({ places, calendars, contents, coming, waiting, consents, clock }));
+  const actualDays = new ActualDaysService(dataSource, clock);
+  actualDaysRoutes(mount, actualDays);
+  const today = { places, calendars, contents, coming, waiting, consents, actualDays, clock };
+  todayRoutes(mount, new TodayService(today));
   const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);

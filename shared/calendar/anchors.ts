@@ -111,3 +111,10 @@ function anchorDaysOf(lead: EntryLead, window: EntryWindow | null, actual: Actua
   const last = actual.to === null ? first : dayNumberFromIso(actual.to);
   return { basis: 'actual', spell: { first, last }, planned };
 }
+
+/** A lead as it goes into another year's draft: on the entries of that draft, and nothing seen yet. */
+export function leadForAnotherYear(lead: EntryLead, newIdOf: ReadonlyMap<string, string>): EntryLead {
+  if (lead.type === 'marker-as-seen') return { ...lead, seen: null };
+  if (lead.type !== 'entry-planned' && lead.type !== 'entry-actual') return lead;
+  return { ...lead, entryId: newIdOf.get(lead.entryId) ?? lead.entryId };
+}

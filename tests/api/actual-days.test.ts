@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Calendar, Entry, EntryInput } from '#shared/contracts/calendars.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import type { Today } from '#shared/contracts/today.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -8,6 +9,7 @@ import {
   entriesOf,
   entryInput,
   openVillage,
+  publishDraft,
   reasonOf,
   submit,
   type Village,
@@ -167,6 +169,24 @@ describe('an entry that hangs on another one', () => {
     const { entries } = (await officer.get(path).expect(200)).body as typeof version;
     const weed = entries.find(({ content }) => content.titleOfficer === 'Weed');
     expect(weed?.dates.window?.bestFrom).toBe('2027-07-12');
+  });
+});
+
+describe('the page of the day', () => {
+  it('shows what is counted from work that was done after the calendar was published', async () => {
+    const { officer } = village;
+    const sowing = await addEntry(officer, calendar.id, SOWING);
+    await addEntry(officer, calendar.id, weeding(sowing.id));
+    await publishDraft(village, calendar.id);
+    api.clock.set(new Date('2027-07-14T06:00:00Z'));
+    const openOnes = async () => {
+      const observer = await api.signIn('observer');
+      const { body } = await observer.get(`/api/communities/${observer.communityId}/today`).expect(200);
+      return (body as Today).openWindows.map(({ titleOfficer }) => titleOfficer);
+    };
+    expect(await openOnes()).not.toContain('Weed');
+    await (await api.signIn('officer')).put(actualPath(sowing), DONE).expect(200);
+    expect(await openOnes()).toContain('Weed');
   });
 });
 

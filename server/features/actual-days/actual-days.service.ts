@@ -1,4 +1,5 @@
 import type { ActualDays, ActualDaysInput } from '#shared/contracts/actual-days.js';
+import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import type { DataSource, EntityManager } from 'typeorm';
 import { ActualDateEntity } from '../../db/entities/actual-date.entity.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -13,6 +14,7 @@ import { recordAudit } from '../audit/audit.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { actualDaysOf } from './known-days.service.js';
+import { withDaysSince } from './live-days.service.js';
 
 /** Work that belongs to a year's calendar may begin before it and reach over its end. */
 const YEARS_AROUND = 1;
@@ -58,6 +60,11 @@ export class ActualDaysService {
       if ((affected ?? 0) === 0) return;
       await this.record(manager, actor, calendarId, entryId, 'actual-days-removed');
     });
+  }
+
+  /** Of a version's entries as somebody sees them: what is counted from work that is done since has its days. */
+  daysSince<B extends VersionEntryBody>(year: number, entries: readonly B[]): Promise<B[]> {
+    return withDaysSince(this.dataSource.manager, year, entries);
   }
 
   /** The calendar of an entry that is there for this person. */

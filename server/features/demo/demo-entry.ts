@@ -58,6 +58,17 @@ export function bySign(spec: Extract<EntryLead, { type: 'sky' }>['spec']): Entry
   return { type: 'sky', spec, occurrence: 1 };
 }
 
+/** A sign of nature with its usual days, as month and day. */
+export function byNature(
+  name: string,
+  [fromMonth, fromDay]: [number, number],
+  [toMonth, toDay]: [number, number],
+  source: string,
+): EntryLead {
+  const usual = { from: { month: fromMonth, day: fromDay }, to: { month: toMonth, day: toDay } };
+  return { type: 'nature-sign', name, usual, source };
+}
+
 /** The office's last day for what is planted. */
 export function lastDay(
   month: number,

@@ -21,7 +21,7 @@ import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
 import type { DemoEntry, DemoVariant } from './demo-entry.js';
 import { DEMO_DOMAIN, THOLMERE_LANDING, VARDESCA_TERRACES, type DemoVillage } from './demo-villages.data.js';
-import { BERRY_WEEK, THOLMERE_ENTRIES } from './tholmere-entries.data.js';
+import { BERRY_WEEK, THOLMERE_ENTRIES, THOLMERE_VARIANTS } from './tholmere-entries.data.js';
 import { LAMP_EVENING, VARDESCA_ENTRIES, VARDESCA_VARIANTS } from './vardesca-entries.data.js';
 
 const DEMO_YEAR = 2027;
@@ -56,7 +56,7 @@ const NEIGHBOURS: readonly Neighbour[] = [
   {
     village: THOLMERE_LANDING,
     entries: THOLMERE_ENTRIES,
-    variants: [],
+    variants: THOLMERE_VARIANTS,
     kept: BERRY_WEEK,
     group: { name: 'Pickers', founder: 'elder-c3', members: ['elder-c3', 'observer3'] },
     officer: 'officer3',

@@ -1,4 +1,13 @@
-import { byStar, bySign, days, demoEntry, type DemoEntry } from './demo-entry.js';
+import {
+  byNature,
+  byStar,
+  bySign,
+  days,
+  demoEntry,
+  lastDay,
+  type DemoEntry,
+  type DemoVariant,
+} from './demo-entry.js';
 
 const BELT_AT_NINE = bySign({
   kind: 'due-meridian',
@@ -6,13 +15,14 @@ const BELT_AT_NINE = bySign({
   facing: 'south',
   solarHour: 21,
 });
+const BIRCH_LEAF = byNature('birch leaf the size of a thumbnail', [5, 23], [5, 27], 'Elder C-2');
 /** The first night after the light nights on which bright stars come out. */
 const FIRST_STARS = bySign({ kind: 'dark-night', end: 'first', depthDeg: 6 });
 
 /**
  * The year of Tholmere Landing, an invented village: titles, windows and customs are made up for this product and need
- * an agronomist before any real use. The ice road (C05), oats (C07) and potato planting (C08) go by signs of nature;
- * no entry can be led by one yet, so they stay out, and with them the variants that they carry.
+ * an agronomist before any real use. The ice road (C05) goes by a log and a notice, by neither of which an entry can be led
+ * yet, so it stays out.
  */
 export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
   demoEntry('C01', {
@@ -73,6 +83,32 @@ export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
     giver: 'Elder C-1',
     sharingLevel: 'village',
   }),
+  demoEntry('C07', {
+    titleVillage: 'Λëva ranvǭ',
+    titleOfficer: 'Sow oats and fodder',
+    kind: 'farm',
+    icon: 'sow',
+    crop: 'oats, grass',
+    lead: BIRCH_LEAF,
+    offsets: days(-3, 0, 14, 16),
+    otherSigns: 'Both of these: geese grazing the low meadow; soil dry enough to crumble',
+    ifLate: 'After 12 June fodder only',
+    giver: 'Elder C-2',
+  }),
+  demoEntry('C08', {
+    titleVillage: 'Ëlda mën',
+    titleOfficer: 'Plant potato',
+    kind: 'farm',
+    icon: 'plant',
+    crop: 'early potato',
+    lead: BIRCH_LEAF,
+    offsets: days(2, 5, 18, 19),
+    ...lastDay(6, 15, 'Agricultural office'),
+    otherSigns:
+      'Both of these: soil of 8 degrees at a finger depth three mornings; night frost no worse than light',
+    ifLate: 'After 15 June plant under cover only',
+    giver: 'Elder C-2',
+  }),
   demoEntry('C09', {
     titleVillage: 'Λëva ran',
     titleOfficer: 'Hay',
@@ -120,6 +156,26 @@ export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
     giver: 'Elder C-1',
     sharingLevel: 'village',
   }),
+];
+
+/** Another keeper counts from the river, not from the birch. */
+export const THOLMERE_VARIANTS: readonly DemoVariant[] = [
+  {
+    code: 'C08',
+    by: 'elder-c3',
+    content: {
+      difference: 'other-sign',
+      lead: byNature('river free of ice at the landing', [5, 8], [5, 14], 'Elder C-3'),
+      offsets: days(14, 18, 26, 30),
+      otherSigns: 'Both of these: soil of 8 degrees at a finger depth; night frost no worse than light',
+      ifLate: 'Under cover only',
+      giver: 'Elder C-3',
+      confidence: 'fair',
+      basis: 'own-years',
+      note: 'The river knows the cold of the ground better than the tree.',
+      sharingLevel: 'open',
+    },
+  },
 ];
 
 /** Where the berries are is the pickers' to know. */

@@ -1,3 +1,4 @@
+import { lateSaid, signsSaid } from '#shared/calendar/said-words.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
@@ -40,23 +41,12 @@ export function toSheetEntries(
       fixedDate: fixedDateOf({ content, dates }),
       dateSetBy: dateSetBy(content),
       lastAdvised: lastAdvisedOf({ content, dates }, year),
-      signs: signsOf(content),
+      signs: signsSaid(content),
       signsNeeded: content.record?.signs.needed ?? null,
-      ifLate: lateOf(content),
+      ifLate: lateSaid(content),
       caution: content.caution,
       whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
     }));
-}
-
-/** Signs by name, those of the record and those written freely. */
-function signsOf({ otherSigns, record }: EntryInput): string {
-  const named = (record?.signs.list ?? []).map(({ name }) => name).join(', ');
-  return [named, otherSigns].filter((text) => text !== '').join('. ');
-}
-
-/** The first step and the one after it. */
-function lateOf({ ifLate, record }: EntryInput): string {
-  return [ifLate, record?.work.ifLaterStill ?? ''].filter((text) => text !== '').join('\n');
 }
 
 interface Line extends Body {
@@ -86,7 +76,7 @@ function linesOf(body: VersionEntryBody, files: Translate): Line[] {
     if (variant === undefined)
       return [{ content: plain, dates: dated, title: told('ownDays', content.giver) }];
     const { lead, otherSigns, ifLate, giver } = variant.content;
-    const timed = { ...plain, lead, otherSigns, ifLate };
+    const timed = { ...plain, lead, otherSigns, ifLate, record: undefined };
     return [{ content: timed, dates: dated, title: told('otherDays', giver) }];
   });
   const first = { content, dates: { ...dates, window }, title: joined ? told('safeDays', '') : title };
@@ -109,8 +99,7 @@ function fixedDateOf({ content, dates: { window } }: Body): string | null {
 
 /** Said once: where the same office set the last date, its name stands there. */
 function dateSetBy({ lead, lastDate }: EntryInput): string {
-  if (lead.type !== 'fixed-date' && lead.type !== 'nature-sign') return '';
-  if (lead.source === lastDate?.source) return '';
+  if (lead.type !== 'fixed-date' || lead.source === lastDate?.source) return '';
   return lead.source;
 }
 

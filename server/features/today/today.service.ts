@@ -1,3 +1,4 @@
+import { lateSaid, signsSaid } from '#shared/calendar/said-words.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import { boardDayOf } from '#shared/calendar/board-days.js';
 import type { Calendar } from '#shared/contracts/calendars.js';
@@ -7,6 +8,7 @@ import { civilDateFromIso } from '#shared/kernel/iso-date.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import type { ActualDaysService } from '../actual-days/actual-days.service.js';
 import type { CalendarsService } from '../calendars/calendars.service.js';
 import type { ConsentsService } from '../consents/consents.service.js';
 import { civilDateAt } from '../places/place-day.service.js';
@@ -23,6 +25,7 @@ export interface TodayParts {
   coming: ComingMarkersService;
   waiting: WaitingService;
   consents: ConsentsService;
+  actualDays: ActualDaysService;
   clock: Clock;
 }
 
@@ -73,7 +76,10 @@ export class TodayService {
       if (calendar.published === null) continue;
       const number = String(calendar.published.number);
       const { header, entries } = await this.parts.contents.read(actor, calendar.id, number);
-      found.push({ calendarId: calendar.id, header, entries });
+      found.push({
+        ...{ calendarId: calendar.id, header },
+        entries: await this.parts.actualDays.daysSince(header.year, entries),
+      });
     }
     return found;
   }
@@ -113,8 +119,8 @@ function openWindows({ calendarId, entries }: CalendarContent, date: string): Op
         titleVillage: content.titleVillage,
         icon: content.icon,
         window,
-        ifLate: content.ifLate,
-        otherSigns: content.otherSigns,
+        ifLate: lateSaid(content),
+        otherSigns: signsSaid(content),
         hasLastDate: content.hasLastDate,
       },
     ];

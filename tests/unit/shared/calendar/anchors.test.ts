@@ -4,6 +4,7 @@ import {
   circleFrom,
   hangingOn,
   inAnchorOrder,
+  leadForAnotherYear,
   type ActualSpell,
   type AnchorFacts,
   type TimedEntry,
@@ -139,5 +140,19 @@ describe('a sign of nature', () => {
     expect(entry('sow', usual([12, 20], [1, 10])).dates?.counted).toMatchObject({
       ...{ from: '2027-12-20', to: '2028-01-10' },
     });
+  });
+});
+
+describe('a lead in another year', () => {
+  it('hangs on the entry of that year, and has seen nothing yet', () => {
+    const ids = new Map([['sow', 'sow-2028']]);
+    expect(leadForAnotherYear(planned('sow'), ids)).toEqual(planned('sow-2028'));
+    expect(leadForAnotherYear(actual('sow'), ids)).toEqual(actual('sow-2028'));
+    const star = { markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 } as const;
+    const seen = { date: '2027-06-12', by: 'Tirel', agreedBy: 'Elder A-1' };
+    expect(leadForAnotherYear({ type: 'marker-as-seen', ...star, seen }, ids)).toEqual({
+      ...{ type: 'marker-as-seen', ...star, seen: null },
+    });
+    expect(leadForAnotherYear(SOWING, ids)).toBe(SOWING);
   });
 });
