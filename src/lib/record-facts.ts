@@ -84,7 +84,9 @@ export function useRecordFacts(): (record: EventRecord | undefined) => Record<Re
       },
     ];
     const check = (of: TextCheck | null) =>
-      of === null ? '' : t('check.said', { ...of, day: of.day === '' ? '…' : dates.day(of.day) });
+      of === null || of.day === '' || of.name === ''
+        ? ''
+        : t('check.said', { ...of, day: dates.day(of.day) });
     const trust = ({ trust: { confidence, by, basis }, checked }: EventRecord) => [
       {
         key: 'confidence',

@@ -1,6 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { signOffNeeds } from '#shared/calendar/sign-off-needs.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import { More } from '#src/ui/fold.js';
 import { Well } from '#src/ui/surfaces.js';
 
 /** What the entry still has to say before elders are asked about it. Nothing of it keeps a draft from being saved. */
@@ -12,14 +13,13 @@ export function RecordNeeds({ content }: { content: EntryInput }) {
   if (needs.length === 0) return null;
   return (
     <Well className="mt-3">
-      <p>
-        <strong>{t('needs.title', { count: needs.length })}</strong>
-      </p>
-      <ul className="list-disc ps-6">
-        {needs.map((need) => (
-          <li key={need}>{t(`needs.need.${need}`)}</li>
-        ))}
-      </ul>
+      <More label={t('needs.title', { count: needs.length })}>
+        <ul className="list-disc ps-6">
+          {needs.map((need) => (
+            <li key={need}>{t(`needs.need.${need}`)}</li>
+          ))}
+        </ul>
+      </More>
       <p className="text-small text-umber-soft">{t('needs.draft')}</p>
     </Well>
   );

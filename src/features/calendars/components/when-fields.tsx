@@ -34,6 +34,7 @@ export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
     <div className="grid gap-4">
       <PickGroup
         label={t('form.leadType')}
+        className="lead-picks"
         value={draft.leadType}
         onChange={(leadType) => {
           change({ leadType });
