@@ -95,7 +95,7 @@ export const texts = {
     needed: 'How many of them are needed',
     neededOf: '{{needed}} of {{count}}',
     mustHave: 'Without which one nothing begins',
-    noneOfThem: 'none of them in particular',
+    noneOfThem: 'none in particular',
     mustHaveSaid: 'not without: {{name}}',
     /** Read aloud in place of the marks. */
     neededForEars_one: '{{count}} sign of {{total}} is needed',
