@@ -9,9 +9,7 @@ import { createDataSource } from './db/data-source.js';
 import { DatabaseUnfitError, migrate } from './db/migrate.js';
 import { sweepOrphans } from './features/attachments/attachment-sweep.service.js';
 import { holdsDemoAccounts, seedDemo } from './features/demo/demo.service.js';
-import { removeOldLetters } from './features/letters/letter-rounds.service.js';
-import { removeOldCodes } from './features/session/old-codes.service.js';
-import { removeExpiredSessions } from './features/session/end-sessions.service.js';
+import { removeWhatIsOver } from './features/privacy/retention.service.js';
 import { firstStewardToken } from './features/session/first-start.service.js';
 import type { Clock } from './http/context.js';
 import { errorForLog } from './http/error-for-log.js';
@@ -130,12 +128,8 @@ function listen(express: ReturnType<typeof createApp>['express'], config: Config
 
 function tidyDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
   const tidy = () => {
-    Promise.all([
-      removeExpiredSessions(dataSource.manager, clock.now()),
-      removeOldLetters(dataSource.manager, clock.now()),
-      removeOldCodes(dataSource.manager, clock.now()),
-    ]).catch((error: unknown) => {
-      log.warn({ err: errorForLog(error) }, 'old sessions, letters and codes stay for another day');
+    removeWhatIsOver(dataSource.manager, clock.now()).catch((error: unknown) => {
+      log.warn({ err: errorForLog(error) }, 'old sessions, letters, codes and cards stay for another day');
     });
   };
   tidy();

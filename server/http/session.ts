@@ -1,3 +1,4 @@
+import { KEPT_DAYS } from '#shared/contracts/privacy.js';
 import session from 'express-session';
 import type { RequestHandler } from 'express';
 import type { SessionCard, SessionDevice, SessionHelping } from '../db/entities/session.entity.js';
@@ -14,7 +15,7 @@ declare module 'express-session' {
   }
 }
 
-const LIFETIME_MS = 14 * 24 * 60 * 60 * 1000;
+const LIFETIME_MS = KEPT_DAYS.session * 24 * 60 * 60 * 1000;
 
 /** Behind https the name itself makes browsers refuse a cookie that another host of the domain has set. */
 export function sessionCookieName(secure: boolean): string {

@@ -20,6 +20,15 @@ export const PURPOSES = [
 ] as const;
 export type Purpose = (typeof PURPOSES)[number];
 
+/** How many days that is kept which has done its service; the page says it and the server keeps to it. */
+export const KEPT_DAYS = {
+  /** Without use. */
+  session: 14,
+  /** A code, a link or a card, after its end. */
+  endedWayIn: 30,
+  letter: 400,
+} as const;
+
 /** Who stands behind the machine and the post, as the operator said it; null where nothing was said. */
 export const privacy = z.strictObject({
   purposes: z.array(z.strictObject({ purpose: z.enum(PURPOSES), tables: z.array(z.string()) })),

@@ -1,6 +1,8 @@
 import { CARD_ROLES, type CardEnd } from '#shared/contracts/cards.js';
+import { KEPT_DAYS } from '#shared/contracts/privacy.js';
 import type { Role } from '#shared/contracts/people.js';
-import type { EntityManager } from 'typeorm';
+import { subDays } from 'date-fns';
+import { LessThan, type EntityManager } from 'typeorm';
 import { SessionEntity } from '../../db/entities/session.entity.js';
 import { SignInCardEntity } from '../../db/entities/sign-in-card.entity.js';
 import { recordAudit } from '../audit/audit.service.js';
@@ -49,4 +51,9 @@ export async function endCard(
     subjectId: personId,
     details: { why },
   });
+}
+
+/** Cards that ended long ago; that they ended stands in the records. */
+export async function removeOldCards(manager: EntityManager, now: Date): Promise<void> {
+  await manager.delete(SignInCardEntity, { endedAt: LessThan(subDays(now, KEPT_DAYS.endedWayIn)) });
 }

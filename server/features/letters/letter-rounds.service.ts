@@ -1,10 +1,9 @@
+import { KEPT_DAYS } from '#shared/contracts/privacy.js';
 import { subDays } from 'date-fns';
 import { In, LessThan, type EntityManager } from 'typeorm';
 import { LetterEntity } from '../../db/entities/letter.entity.js';
 import type { LetterPlannerService } from './letter-planner.service.js';
 import type { LetterSenderService } from './letter-sender.service.js';
-
-const KEPT_DAYS = 400;
 
 /** One round looks what waits and sends what is due. Rounds of one process never overlap. */
 export class LetterRounds {
@@ -43,7 +42,7 @@ export class LetterRounds {
 
 /** Old letters go; by then nothing that they were about is in review any more. */
 export async function removeOldLetters(manager: EntityManager, now: Date): Promise<void> {
-  await manager.delete(LetterEntity, { createdAt: LessThan(subDays(now, KEPT_DAYS)) });
+  await manager.delete(LetterEntity, { createdAt: LessThan(subDays(now, KEPT_DAYS.letter)) });
 }
 
 /** After older tables came back: what waits in them may have gone since, and nobody gets a letter twice. */

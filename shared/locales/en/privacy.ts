@@ -16,12 +16,13 @@ export const texts = {
     'signing-in': {
       name: 'Signing in',
       what: 'Where a person is signed in, codes and cards to come in with.',
-      until: 'Sessions for fourteen days without use; codes for a month after their time.',
+      until:
+        'Sessions for {{session}} days without use; codes, links and cards for {{endedWayIn}} days after their end.',
     },
     letters: {
       name: 'Letters',
       what: 'Which letters were sent and how a person wants to be asked. Letters tell no content.',
-      until: 'Four hundred days.',
+      until: 'Letters for {{letter}} days; how a person wants to be asked until they leave.',
     },
     places: {
       name: 'Places',
@@ -56,7 +57,7 @@ export const texts = {
     'taking-back': {
       name: 'Taking back',
       what: 'That something was taken back, when and by whom; nothing of what it was.',
-      until: 'As long as old copies of the tables could bring it back.',
+      until: 'As long as the village uses the product: old copies of the tables could bring it back.',
     },
   },
   who: 'Who sees it: people of the village as far as the level of each thing allows. Whoever runs the machine can reach its tables, and no role of the product reaches past the levels.',

@@ -1,3 +1,4 @@
+import { KEPT_DAYS } from '#shared/contracts/privacy.js';
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { usePageTitle } from '#src/lib/page-title.js';
@@ -27,7 +28,7 @@ export function PrivacyPage() {
           <section key={purpose} className="mt-4 border-t border-hairline pt-3">
             <h2 className="text-body">{t(`purpose.${purpose}.name`)}</h2>
             <p>{t(`purpose.${purpose}.what`)}</p>
-            <p className="text-umber-soft">{t(`purpose.${purpose}.until`)}</p>
+            <p className="text-umber-soft">{t(`purpose.${purpose}.until`, KEPT_DAYS)}</p>
           </section>
         ))}
         {data !== undefined && (
