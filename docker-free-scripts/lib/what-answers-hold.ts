@@ -53,6 +53,18 @@ const either =
 /** The figure that an entry goes by. */
 const leading: Rule = (person, thing) => thing.level === 'elders' && sees(person, thing);
 
+/**
+ * Kept by its own people and theirs to answer: elders who see it, the group, giver and successor. Whoever wrote it, here
+ * the giver, answers only where nobody but giver and successor could.
+ */
+const theirs: Rule = (person, thing) => {
+  const isVillages = (thing.level === 'open' || thing.level === 'village') && thing.season === 'none';
+  if (isVillages || !sees(person, thing)) return false;
+  if (person === 'giver') return isLone(thing);
+  return person === 'elder' || person === 'successor' || thing.level === 'group';
+};
+const isLone = ({ level, season }: Combination) => level === 'sealed' || season !== 'none';
+
 /** Where one entry is asked for after the other, one for each value of an axis stands for all combinations. */
 export function isLookedAt({ level, season, consent }: Combination): boolean {
   const isPlain = consent === 'nobody asked' && season === 'none';
@@ -100,6 +112,10 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
   listAnswers: { answer: keptSeen },
+  readOwnEntries: {
+    ...{ entry: theirs, 'led entry': sees, figure: leading },
+    answer: both(bringers, (_person, thing) => isLone(thing)),
+  },
   printSheet: BOARD,
   previewSheet: BOARD,
   // Who says yes here says it to every use, so files to take along hold what the board holds.
@@ -160,6 +176,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listAskedSharing: 'is levels and ids',
   readSharing: 'is levels, people and ids',
   listWithdrawn: 'is ids',
+  readAfterDeath: 'is numbers of things',
   listSheetsToReplace: 'is numbers of versions',
 };
 
