@@ -113,7 +113,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   compareVersions: ENTRIES,
   listAnswers: { answer: keptSeen },
   readOwnEntries: {
-    ...{ entry: theirs, 'led entry': sees, figure: leading },
+    ...{ entry: theirs, 'led entry': sees, variant: theirs, figure: leading },
     answer: both(bringers, (_person, thing) => isLone(thing)),
   },
   printSheet: BOARD,
