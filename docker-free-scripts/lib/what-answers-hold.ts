@@ -14,7 +14,17 @@ import {
  * which `recording` and `picture title` stand in lists.
  */
 export const PLANTED_KINDS = [
-  ...(['entry', 'led entry', 'later entry', 'variant', 'answer', 'note', 'figure', 'story'] as const),
+  ...([
+    'entry',
+    'led entry',
+    'later entry',
+    'variant',
+    'kept variant',
+    'answer',
+    'note',
+    'figure',
+    'story',
+  ] as const),
   ...(['consent', 'figure consent'] as const),
   ...(['recording', 'sound', 'picture title', 'picture', 'thumbnail'] as const),
 ] as const;
@@ -82,7 +92,13 @@ const askedFigure = (rule: Rule): Rule => both((_person, thing) => isAskedFigure
 
 const ALL_FIGURES: Holds = { figure: sees };
 const ONE_FIGURE: Holds = { figure: askedFigure(sees) };
-const ENTRIES: Holds = { entry: sees, 'led entry': sees, 'later entry': keptSeen, variant: sees };
+const ENTRIES: Holds = {
+  entry: sees,
+  'led entry': sees,
+  'later entry': keptSeen,
+  variant: sees,
+  'kept variant': sees,
+};
 const BOARD: Holds = { entry: onBoard, 'later entry': both(keptSeen, onBoard) };
 const ONE_CONSENT: Holds = { consent: looked(agreedOn), entry: looked(agreedOn) };
 const TITLED_FILES: Holds = { recording: sees, 'picture title': sees };
@@ -108,12 +124,12 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   listFigures: { figure: sees, story: sees },
   readFigure: { figure: sees, story: sees, 'led entry': keptSeen },
   listEntries: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
-  listVariants: { variant: keptSeen },
+  listVariants: { variant: keptSeen, 'kept variant': keptSeen },
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
   listAnswers: { answer: keptSeen },
   readOwnEntries: {
-    ...{ entry: theirs, 'led entry': sees, variant: theirs, figure: leading },
+    ...{ entry: theirs, 'led entry': sees, 'kept variant': theirs, figure: leading },
     answer: both(bringers, (_person, thing) => isLone(thing)),
   },
   printSheet: BOARD,
@@ -176,7 +192,6 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listAskedSharing: 'is levels and ids',
   readSharing: 'is levels, people and ids',
   listWithdrawn: 'is ids',
-  readAfterDeath: 'is numbers of things',
   listSheetsToReplace: 'is numbers of versions',
 };
 

@@ -101,12 +101,16 @@ export async function furnishLevels(
   await give({ level: 'village', season: 'inside', consent: 'nobody asked' }, ledBy(figureAt('elders')));
   const open = expectFound(entries, plainAt('open'));
   const kept = entries.filter((entry) => !isVillages(entry));
-  const variant = (entryId: string, level: 'village' | 'elders', seen: Combination) =>
-    addLevelledVariant(elder, calendar.id, entryId, level, plant('variant', seen));
+  const variant = (
+    entryId: string,
+    level: 'village' | 'elders',
+    seen: Combination,
+    kind: 'variant' | 'kept variant' = 'variant',
+  ) => addLevelledVariant(elder, calendar.id, entryId, level, plant(kind, seen));
   const variantIds = [
     await variant(open.id, 'village', plainAt('village')),
     await variant(open.id, 'elders', plainAt('elders')),
-    await variant(expectFound(entries, plainAt('elders')).id, 'village', plainAt('elders')),
+    await variant(expectFound(entries, plainAt('elders')).id, 'village', plainAt('elders'), 'kept variant'),
   ];
 
   const first = await submit(officer, calendar.id);
