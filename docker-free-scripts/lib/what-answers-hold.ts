@@ -136,6 +136,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   previewSheet: BOARD,
   // Who says yes here says it to every use, so files to take along hold what the board holds.
   exportCalendarIcs: BOARD,
+  exportCalendarCsv: BOARD,
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,
   readAttachment: TITLED_FILES,

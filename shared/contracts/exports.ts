@@ -12,6 +12,10 @@ export const icsQuery = z.strictObject({
 });
 export type IcsQuery = z.infer<typeof icsQuery>;
 
+/** `mark` puts the sign of UTF-8 in front, by which spreadsheets read letters of all scripts. */
+export const csvQuery = z.strictObject({ mark: z.enum(['yes', 'no']).default('yes') });
+export type CsvQuery = z.infer<typeof csvQuery>;
+
 const params = z.strictObject({ calendarId: id, number: versionNumber });
 
 /** What leaves the calendar as a file: open and the village's entries that were agreed to be handed on. */
@@ -25,5 +29,15 @@ export const exportsEndpoints = {
     params,
     query: icsQuery,
     fileType: 'text/calendar',
+  }),
+  csv: defineEndpoint({
+    id: 'exportCalendarCsv',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/calendar.csv',
+    summary: 'A version or the draft as CSV, in columns that can be read back',
+    access: member('calendar', ...ROLES),
+    params,
+    query: csvQuery,
+    fileType: 'text/csv',
   }),
 } as const;

@@ -1,5 +1,9 @@
 import ICAL from 'ical.js';
+import Papa from 'papaparse';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
+import { csvText, csvWords } from '#shared/kernel/csv.js';
+import { en } from '#shared/locales/index.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -123,5 +127,62 @@ describe('iCalendar', () => {
       const text = await textOf(client, published.number, 'calendar.ics');
       expect(text).not.toMatch(/Of the elders|Not for telephones/u);
     }
+  });
+});
+
+describe('CSV', () => {
+  const tableOf = (text: string) => {
+    const { data, errors, meta } = Papa.parse<string[]>(text, { skipEmptyLines: true });
+    expect([errors, meta.linebreak]).toEqual([[], '\r\n']);
+    const [titles = [], ...lines] = data;
+    expect(titles).toEqual(CALENDAR_CSV_COLUMNS.map(({ id }) => en.files.calendarCsv.column[id]));
+    return lines.map((cells) =>
+      Object.fromEntries(CALENDAR_CSV_COLUMNS.map(({ id }, index) => [id, csvWords(cells[index] ?? '')])),
+    );
+  };
+
+  it('gives back to another program exactly what stands in the calendar', async () => {
+    const answer = await staff.get(path(published.number, 'calendar.csv?mark=no')).expect(200);
+    expect(answer.headers['content-type']).toBe('text/csv; charset=utf-8');
+    const [line, second] = tableOf(answer.text);
+    const { titleVillage, titleOfficer, caution, otherSigns } = sow.content;
+    const { window, marker } = sow.dates;
+    expect(line).toMatchObject({
+      ...{ titleVillage, titleOfficer, caution, otherSigns, ifLate: '-5', kind: 'farm', level: '' },
+      ...{ earliest: window?.earliest, bestFrom: window?.bestFrom, bestTo: window?.bestTo },
+      ...{ lastAdvised: window?.lastAdvised, signExpected: marker?.expected.gregorian },
+      ...{ signEarly: marker?.early?.gregorian, signLate: marker?.late?.gregorian },
+      ...{ leadType: 'marker', leadMarker: 'pleiades', leadOccurrence: '1', bestFromDays: '7' },
+    });
+    expect(second).toMatchObject({
+      ...{ leadType: 'fixed-date', leadDate: '12-28', leadSource: 'Water committee' },
+      ...{ protectiveWatch: 'yes', earliestDays: '0' },
+    });
+  });
+
+  it('runs no formula in a spreadsheet and leaves numbers alone', async () => {
+    const text = await textOf(staff, published.number, 'calendar.csv?mark=no');
+    expect(text).toContain(',"\'=Sow; long, millet\\",');
+    expect(text).toContain(',-5,');
+    const words = ['=1', "'=1", "''@x", '-5', '+3.25', '-5 days', '\t', "'plain", 'a"b,c\nd', ''];
+    expect(Papa.parse<string[]>(csvText([words])).data[0]?.map(csvWords)).toEqual(words);
+  });
+
+  it('begins with the sign of UTF-8 unless that is not wanted', async () => {
+    const bytes = async (query: string) =>
+      Buffer.from((await staff.get(path(published.number, `calendar.csv${query}`)).expect(200)).text);
+    const mark = Buffer.from('\ufeff');
+    expect((await bytes('')).subarray(0, 3).equals(mark)).toBe(true);
+    expect((await bytes('?mark=no')).subarray(0, 3).equals(mark)).toBe(false);
+  });
+
+  it('says the level to whoever compiles and reviews, marks the draft, and holds what the telephone may hold', async () => {
+    const lines = tableOf(await textOf(village.officer, 'draft', 'calendar.csv?mark=no'));
+    expect(lines.map(({ titleOfficer, level, issue }) => [titleOfficer, level, issue])).toEqual([
+      ['=Sow; long, millet\\', 'open', 'draft'],
+      ['Watch over the year’s end', 'open', 'draft'],
+      ['Later in the draft', 'open', 'draft'],
+    ]);
+    await staff.get(path('draft', 'calendar.csv')).expect(404);
   });
 });

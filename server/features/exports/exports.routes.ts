@@ -8,4 +8,8 @@ export function exportsRoutes(mount: Mount, files: ExportsService): void {
     const { content, fileName } = await files.ics(actor, params.calendarId, params.number, query);
     return new FileReply(content, fileName);
   });
+  mount.forMember(exportsEndpoints.csv, async ({ params, query }, actor) => {
+    const { content, fileName } = await files.csv(actor, params.calendarId, params.number, query);
+    return new FileReply(content, fileName);
+  });
 }

@@ -1,9 +1,10 @@
-import type { IcsQuery } from '#shared/contracts/exports.js';
+import type { CsvQuery, IcsQuery } from '#shared/contracts/exports.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
-import type { Actor } from '../../http/actor.js';
+import { seesDrafts, type Actor } from '../../http/actor.js';
 import { fileNameOf } from '../../print/file-name.js';
 import { translatorFor } from '../../print/translator.js';
 import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
+import { calendarCsv } from './calendar-csv.js';
 import { calendarIcs } from './calendar-ics.js';
 
 interface ExportedFile {
@@ -18,6 +19,12 @@ export class ExportsService {
   async ics(actor: Actor, calendarId: string, number: string, query: IcsQuery): Promise<ExportedFile> {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
     return { content: calendarIcs(content, query.alarmDays ?? null), fileName: nameOf(content, 'ics') };
+  }
+
+  async csv(actor: Actor, calendarId: string, number: string, { mark }: CsvQuery): Promise<ExportedFile> {
+    const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
+    const text = calendarCsv(content, { mark: mark === 'yes', levels: seesDrafts(actor) });
+    return { content: text, fileName: nameOf(content, 'csv') };
   }
 }
 

@@ -1,7 +1,7 @@
 import { parse } from 'csv-parse/sync';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { csvText } from '#shared/kernel/csv.js';
+import { csvText, csvWords } from '#shared/kernel/csv.js';
 
 describe('csvText', () => {
   it('ends every line with CRLF and quotes only what RFC 4180 asks for', () => {
@@ -26,5 +26,25 @@ describe('csvText', () => {
         expect(parse(csvText(rows))).toEqual(rows);
       }),
     );
+  });
+});
+
+describe('csvWords', () => {
+  it('takes off what csvText put in front, and nothing else', () => {
+    const words = fc.oneof(
+      fc.string({ unit: 'binary' }),
+      fc.stringMatching(/^'{0,3}[=+\-@]\d{0,3}$/u),
+      fc.stringMatching(/^-\d{1,4}$/u),
+    );
+    fc.assert(
+      fc.property(words, (text) => {
+        const [[cell] = []] = parse(csvText([[text, 'end']]));
+        expect(csvWords(cell ?? '')).toBe(text);
+      }),
+    );
+  });
+
+  it('leaves plain numbers alone, with their sign', () => {
+    expect(csvText([['-5', '-1.5', '-5 days']])).toBe("-5,-1.5,'-5 days\r\n");
   });
 });

@@ -1,0 +1,69 @@
+/**
+ * How a calendar stands in a table: one line an entry, under one line of titles. Whoever writes such a file and whoever
+ * reads one go by this list; titles are words of a language (`files`, `calendarCsv.column.<id>`), ids never change.
+ *
+ * - `text`: words as they are; what a spreadsheet would run as a formula has an apostrophe in front (`csvText` puts it
+ *   there, `csvWords` takes it off), numbers such as -5 have none
+ * - `code`: a word of a closed list of the contracts, e.g. `farm`, `heliacal-rising`
+ * - `whole-number`: digits with an optional minus; offsets count days from the leading day
+ * - `iso-date`: `YYYY-MM-DD`, Gregorian
+ * - `month-day`: `MM-DD`, a day of every year
+ * - `yes-no`: `yes` or `no`
+ * - `json`: a lead that has no columns of its own, as canonical JSON
+ *
+ * An empty cell says nothing. `given` columns make an entry when they are read back; `computed` ones are what the engine
+ * made of it, `about` ones say where the file comes from: both are passed over.
+ */
+export type CsvColumnKind = 'text' | 'code' | 'whole-number' | 'iso-date' | 'month-day' | 'yes-no' | 'json';
+export type CsvColumnPart = 'given' | 'computed' | 'about';
+
+export interface CsvColumn {
+  id: string;
+  kind: CsvColumnKind;
+  part: CsvColumnPart;
+}
+
+const column = <Id extends string>(id: Id, kind: CsvColumnKind, part: CsvColumnPart = 'given') => ({
+  ...{ id, kind, part },
+});
+
+export const CALENDAR_CSV_COLUMNS = [
+  column('titleVillage', 'text'),
+  column('titleOfficer', 'text'),
+  column('kind', 'code'),
+  column('icon', 'code'),
+  column('crop', 'text'),
+  column('earliest', 'iso-date', 'computed'),
+  column('bestFrom', 'iso-date', 'computed'),
+  column('bestTo', 'iso-date', 'computed'),
+  column('lastAdvised', 'iso-date', 'computed'),
+  column('signExpected', 'iso-date', 'computed'),
+  column('signEarly', 'iso-date', 'computed'),
+  column('signLate', 'iso-date', 'computed'),
+  column('leadType', 'code'),
+  column('leadMarker', 'code'),
+  column('leadPhenomenon', 'code'),
+  column('leadOccurrence', 'whole-number'),
+  column('leadDate', 'month-day'),
+  column('leadSource', 'text'),
+  column('leadOther', 'json'),
+  column('earliestDays', 'whole-number'),
+  column('bestFromDays', 'whole-number'),
+  column('bestToDays', 'whole-number'),
+  column('lastAdvisedDays', 'whole-number'),
+  column('lastDate', 'month-day'),
+  column('lastDateSource', 'text'),
+  column('protectiveWatch', 'yes-no'),
+  column('otherSigns', 'text'),
+  column('ifLate', 'text'),
+  column('caution', 'text'),
+  column('notes', 'text'),
+  column('giver', 'text'),
+  column('level', 'code', 'about'),
+  column('year', 'whole-number', 'about'),
+  column('place', 'text', 'about'),
+  column('issue', 'text', 'about'),
+  column('care', 'text', 'about'),
+] as const satisfies readonly CsvColumn[];
+
+export type CalendarCsvColumn = (typeof CALENDAR_CSV_COLUMNS)[number]['id'];
