@@ -7,13 +7,14 @@ import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
 import { actorFor, type HelpingRules } from './on-behalf.js';
 import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
+import { PreparedReply } from './reply.js';
 import { withUpload, type UploadedFile } from './upload.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
 type Answer<E extends Endpoint> = E['fileType'] extends string
   ? FileReply
   : E['response'] extends z.ZodType
-    ? z.input<E['response']>
+    ? z.input<E['response']> | PreparedReply
     : FileReply | StoredFileReply | undefined;
 
 export interface Call<E extends Endpoint> {
@@ -164,6 +165,11 @@ function reply(endpoint: Endpoint, response: Response, answer: unknown): void {
     return;
   }
   response.status(endpoint.status).setHeader('Cache-Control', 'no-store');
+  if (answer instanceof PreparedReply) {
+    if (answer.endpointId !== endpoint.id) throw new TypeError(`${endpoint.id} was given another's answer`);
+    response.type('json').send(answer.json);
+    return;
+  }
   if (endpoint.response === undefined) response.end();
   else response.json(endpoint.response.parse(answer));
 }

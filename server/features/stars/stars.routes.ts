@@ -1,14 +1,16 @@
 import { starsEndpoints } from '#shared/contracts/stars.js';
 import { FileReply } from '../../http/file-reply.js';
 import type { Mount } from '../../http/mount.js';
-import { wholeList } from '../../http/reply.js';
+import { PreparedReplies, wholeList } from '../../http/reply.js';
 import type { SkylineEffectsService } from './skyline-effects.service.js';
 import type { StarsService } from './stars.service.js';
 
 export function starsRoutes(mount: Mount, stars: StarsService, skylineEffects: SkylineEffectsService): void {
-  mount.forMember(starsEndpoints.list, ({ params, query }, actor) =>
-    stars.list(actor, params.placeId, query.year),
-  );
+  const tables = new PreparedReplies(starsEndpoints.list);
+  mount.forMember(starsEndpoints.list, async ({ params, query }, actor) => {
+    const table = await stars.list(actor, params.placeId, query.year);
+    return tables.of(table, table.items);
+  });
   mount.forMember(starsEndpoints.csv, async ({ params, query }, actor) => {
     const { text, fileName } = await stars.csv(actor, params.placeId, query.year);
     return new FileReply(text, fileName);

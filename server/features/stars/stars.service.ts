@@ -24,6 +24,8 @@ export interface StarTable {
 const FIRST_GREGORIAN_YEAR = 1583;
 
 export class StarsService {
+  private readonly details = new WeakMap<Occurrence, { timeZone: string; detail: OccurrenceDetail }>();
+
   constructor(
     private readonly places: PlacesService,
     private readonly skyYears: SkyYearsService,
@@ -60,8 +62,22 @@ export class StarsService {
     };
   }
 
-  /** Everything that somebody needs who wants to go out and look. */
+  /** Everything that somebody needs who wants to go out and look. An occurrence belongs to one site; only its clock may differ. */
   occurrenceDetail(
+    place: WatchedPlace,
+    markerYear: MarkerYear,
+    phenomenon: Phenomenon,
+    occurrence: Occurrence,
+  ): OccurrenceDetail {
+    const { timeZone } = place;
+    const known = this.details.get(occurrence);
+    if (known?.timeZone === timeZone) return known.detail;
+    const detail = this.detailOf(place, markerYear, phenomenon, occurrence);
+    this.details.set(occurrence, { timeZone, detail });
+    return detail;
+  }
+
+  private detailOf(
     place: WatchedPlace,
     markerYear: MarkerYear,
     phenomenon: Phenomenon,
