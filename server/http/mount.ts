@@ -54,9 +54,13 @@ export class Mount {
     this.expect(endpoint, 'signed-in');
     this.add(endpoint, async (request, call) => {
       const person = signedIn(endpoint, request);
+      const helped = await this.helping.helpedIn(request, person);
       // What is a person's own is done by themself alone: nobody does it while they write for somebody else.
-      if (endpoint.method !== 'GET' && (await this.helping.helpedIn(request, person)) !== null) {
+      if (helped !== null && endpoint.method !== 'GET') {
         throw new AppError('not-allowed', { reason: 'not-while-helping' });
+      }
+      if (helped?.shownPin === true && endpoint.readAsHelped) {
+        return handler(call(), { ...helped.person, byCardIn: helped.communityId });
       }
       return handler(call(), person);
     });

@@ -265,6 +265,7 @@ export const calendarsEndpoints = {
     path: '/api/calendars',
     summary: 'Calendars of all communities of the person',
     access: signedIn,
+    readAsHelped: true,
     query: z.strictObject({ communityId: id.optional() }),
     response: listOf(calendar),
   }),

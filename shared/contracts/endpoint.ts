@@ -45,6 +45,8 @@ export interface Endpoint<
   upload: Upload | null;
   /** True where a session that a card opened is too weak. */
   needsPassword: boolean;
+  /** True where whoever helps somebody, with their PIN, reads what that person would. */
+  readAsHelped: boolean;
 }
 
 interface EndpointSpec<
@@ -66,6 +68,7 @@ interface EndpointSpec<
   fileType?: string;
   upload?: Upload;
   needsPassword?: boolean;
+  readAsHelped?: boolean;
 }
 
 /** Fills the defaults: status 200 with an answer, 204 without one. */
@@ -90,6 +93,7 @@ export function defineEndpoint<
     fileType,
     upload: spec.upload ?? null,
     needsPassword: spec.needsPassword ?? false,
+    readAsHelped: spec.readAsHelped ?? false,
   };
 }
 

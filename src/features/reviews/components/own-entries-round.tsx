@@ -52,6 +52,7 @@ export function OwnEntriesRound({
       {current ? (
         <>
           <EntryView
+            key={current.entry.entryId}
             entry={current.entry}
             header={{
               year: own.year,

@@ -103,7 +103,7 @@ export function ReviewRound({
       )}
       {entry ? (
         <>
-          <EntryView entry={entry} header={header} />
+          <EntryView key={entry.entryId} entry={entry} header={header} />
           <div className="review-entry">
             <OthersWords
               answers={answers.items.filter(
