@@ -113,10 +113,8 @@ export interface OccurrenceDays {
 }
 
 /** From what the window is counted, where it is not a computed day or a fixed date. */
-export const COUNTED_BASES = ['seen', 'usual', 'planned', 'actual', 'waiting', 'gone'] as const;
-
 export interface CountedDays {
-  basis: (typeof COUNTED_BASES)[number];
+  basis: 'seen' | 'usual' | 'planned' | 'actual' | 'waiting' | 'gone';
   /** The days that it is counted from: early days from the first of them, late days from the last. */
   from: IsoDate | null;
   to: IsoDate | null;

@@ -83,8 +83,8 @@ describe('the day on which work was done', () => {
       { saidBy: '' },
       { from: '2027-02-30' },
     ]) {
-      const { body } = await officer.put(actualPath(sowing), { ...DONE, ...wrong }).expect(422);
-      answers.push(fieldsOf(body)[0]);
+      const answer = await officer.put(actualPath(sowing), { ...DONE, ...wrong }).expect(422);
+      answers.push(fieldsOf(answer.body)[0]);
     }
     expect(answers).toEqual([
       ...['from: not-of-this-year', 'to: before-first', 'saidBy: required', 'from: date-form'],
@@ -118,8 +118,8 @@ describe('an entry that hangs on another one', () => {
     const kept = await addEntry(elder, calendar.id, { sharingLevel: 'elders' });
     const path = `/api/calendars/${calendar.id}/entries`;
     for (const entryId of [kept.id, calendar.id]) {
-      const { body } = await officer.post(path, entryInput(weeding(entryId))).expect(422);
-      expect(fieldsOf(body)).toEqual(['lead.entryId: unknown-entry']);
+      const answer = await officer.post(path, entryInput(weeding(entryId))).expect(422);
+      expect(fieldsOf(answer.body)).toEqual(['lead.entryId: unknown-entry']);
     }
     expect(await entriesOf(officer, calendar.id)).toEqual([]);
   });
@@ -181,8 +181,8 @@ describe('the page of the day', () => {
     api.clock.set(new Date('2027-07-14T06:00:00Z'));
     const openOnes = async () => {
       const observer = await api.signIn('observer');
-      const { body } = await observer.get(`/api/communities/${observer.communityId}/today`).expect(200);
-      return (body as Today).openWindows.map(({ titleOfficer }) => titleOfficer);
+      const answer = await observer.get(`/api/communities/${observer.communityId}/today`).expect(200);
+      return (answer.body as Today).openWindows.map(({ titleOfficer }) => titleOfficer);
     };
     expect(await openOnes()).not.toContain('Weed');
     await (await api.signIn('officer')).put(actualPath(sowing), DONE).expect(200);
