@@ -4,7 +4,8 @@ import { AsyncLocalStorage } from 'node:async_hooks';
 /** Who asks. */
 export interface Person {
   id: string;
-  email: string;
+  /** Null where they have none. */
+  email: string | null;
   displayName: string;
   /** Set where a card signed them in: it opens this one village, and nothing that asks for a password. */
   byCardIn?: string;

@@ -8,8 +8,6 @@ export const PIN_MAX = 6;
 /** A card nobody has used by then opens nothing: whoever finds it could choose its PIN. */
 export const CARD_FIRST_USE_DAYS = 14;
 export const CARD_CODE_LENGTH = 18;
-/** A card is weaker than a password, so it is for people who compile, print and administer nothing. */
-export const CARD_ROLES = ['elder', 'observer'] as const;
 
 /** Eighteen letters and digits in groups of three; hyphens, spaces and case do not matter. */
 export const cardCode = z

@@ -5,6 +5,9 @@ import { defineEndpoint, member, signedIn } from './endpoint.js';
 export const ROLES = ['steward', 'officer', 'elder', 'staff', 'observer'] as const;
 export type Role = (typeof ROLES)[number];
 export const role = z.enum(ROLES);
+/** A card is weaker than a password, so it is for people who compile, print and administer nothing. */
+export const CARD_ROLES = ['elder', 'observer'] as const;
+export const isCardRole = (one: Role): boolean => CARD_ROLES.some((each) => each === one);
 export const roles = z
   .array(role)
   .min(1, 'choose-one')
@@ -19,6 +22,17 @@ export const email = z
   .string()
   .transform((value) => value.trim().toLowerCase())
   .pipe(z.email('not-an-email').max(EMAIL_MAX, 'too-long'));
+
+/** Empty for somebody who has none. */
+const emailOrNone = z
+  .string()
+  .transform((value) => value.trim().toLowerCase())
+  .pipe(
+    z
+      .string()
+      .max(EMAIL_MAX, 'too-long')
+      .refine((value) => value === '' || z.email().safeParse(value).success, 'not-an-email'),
+  );
 
 /** Twelve characters in three groups; hyphens and case do not matter. */
 export const oneTimeCode = z
@@ -72,23 +86,36 @@ export type CommunityUpdate = z.infer<typeof communityUpdate>;
 
 export const communityPerson = z.strictObject({
   id,
+  /** Empty where they have none, and for everybody but the steward. */
   email: z.string(),
   displayName: z.string(),
   roles: z.array(role),
-  /** False until the one-time code has been used. */
+  /** False until the one-time code has been used; whoever has no address needs none. */
   active: z.boolean(),
   codeExpiresAt: instant.nullable(),
   version: rowVersion,
 });
 export type CommunityPerson = z.infer<typeof communityPerson>;
 
-export const personInput = z.strictObject({ email, displayName: line(80, 1), roles });
+export const personInput = z
+  .strictObject({
+    email: emailOrNone,
+    displayName: line(80, 1),
+    roles,
+    /** Somebody without an address who belonged to this village before. */
+    personId: id.optional(),
+  })
+  .refine(({ email, roles }) => email !== '' || roles.every(isCardRole), {
+    path: ['email'],
+    error: 'address-needed',
+  });
 export type PersonInput = z.infer<typeof personInput>;
 
-export const personUpdate = z.strictObject({ roles, version: rowVersion });
+/** `email` gives an address to somebody who has none. */
+export const personUpdate = z.strictObject({ roles, email: emailOrNone.optional(), version: rowVersion });
 export type PersonUpdate = z.infer<typeof personUpdate>;
 
-/** Shown once. Null when the person already had an account and needs no code. */
+/** Shown once. Null when the person already had an account and needs no code, or has no address. */
 export const addedPerson = z.strictObject({ person: communityPerson, oneTimeCode: z.string().nullable() });
 export type AddedPerson = z.infer<typeof addedPerson>;
 

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { LetterEntity } from '#server/db/entities/letter.entity.js';
 import type { LetterChoice, StillToAsk } from '#shared/contracts/letters.js';
+import type { AddedPerson } from '#shared/contracts/people.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { addEntry, answerAll, beginCalendar, openVillage, submit } from '#tests/support/calendar-api.js';
 import { linkOf, openTestPost } from '#tests/support/letters.js';
@@ -172,6 +173,29 @@ describe('a submission', () => {
     expect(of(elder)).toMatchObject({ does: 'answer', visitMe: true, letter: 'none' });
     expect(of(elder2)).toMatchObject({ does: 'answer', visitMe: false, letter: 'sent' });
     expect(of(officer)).toBeUndefined();
+  });
+});
+
+describe('whoever has no e-mail address', () => {
+  it('gets no letter and no invitation, and is visited', async () => {
+    const { steward, officer } = await inReview();
+    const people = `/api/communities/${steward.communityId}/people`;
+    const added = await steward
+      .post(people, { email: '', displayName: 'Orra', roles: ['elder'] })
+      .expect(201);
+    const { id } = (added.body as AddedPerson).person;
+    await steward
+      .post(`${people}/${id}/invitation`)
+      .expect(409)
+      .expect(({ body }) => {
+        expect(body).toMatchObject({ reason: 'no-address' });
+      });
+    await round();
+    expect(receivers()).toEqual(['elder', 'elder2', 'elder3']);
+    expect(await rows().countBy({ personId: id })).toBe(0);
+    const path = `/api/communities/${officer.communityId}/still-to-ask`;
+    const { items } = (await officer.get(path).expect(200)).body as { items: StillToAsk[] };
+    expect(items.find(({ personId }) => personId === id)).toMatchObject({ visitMe: true, letter: 'none' });
   });
 });
 

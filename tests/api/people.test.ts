@@ -1,6 +1,8 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import type { MadeCard } from '#shared/contracts/cards.js';
 import type { AddedPerson, Community, CommunityPerson } from '#shared/contracts/people.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import { PIN } from '#tests/support/pin-cards.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 
 let api: TestApi;
@@ -94,6 +96,69 @@ describe('adding a person', () => {
     const answer = await steward.post(people, { ...newcomer, email: 'officer@dawnpeg.example' });
     expect(answer.status).toBe(409);
     expect((answer.body as Problem).reason).toBe('email-known');
+  });
+});
+
+describe('a person without an e-mail address', () => {
+  const elder = { email: '', displayName: 'Orra', roles: ['elder'] };
+  const errorsOf = (answer: { body: unknown }) =>
+    (answer.body as Problem).errors?.map(({ field, code }) => `${field}: ${code}`);
+
+  it('is added with a name alone, needs no code, and comes in with a card', async () => {
+    const { person, oneTimeCode } = await add(elder);
+    expect(person).toMatchObject({ email: '', displayName: 'Orra', active: true });
+    expect(oneTimeCode).toBeNull();
+    const second = await add({ ...elder, displayName: 'Ulme' });
+    expect(second.person.id).not.toBe(person.id);
+
+    const { code } = (await steward.post(`${people}/${person.id}/card`).expect(201)).body as MadeCard;
+    const phone = await api.visitor();
+    const answer = await phone.post('/api/session/card/pin', { code, pin: PIN }).expect(200);
+    expect(answer.body).toMatchObject({ person: { displayName: 'Orra', email: '' } });
+    await phone.get(people).expect(200);
+  });
+
+  it.each(['officer', 'steward', 'staff'])('is no %s: that role signs in with a password', async (role) => {
+    const refused = await steward.post(people, { ...elder, roles: ['elder', role] }).expect(422);
+    expect(errorsOf(refused)).toEqual(['email: address-needed']);
+    const { person } = await add(elder);
+    const later = { roles: [role], version: person.version };
+    expect(errorsOf(await steward.put(`${people}/${person.id}`, later).expect(422))).toEqual([
+      'email: address-needed',
+    ]);
+  });
+
+  it('can be given an address later, though not one that somebody has', async () => {
+    const { person } = await add(elder);
+    const roles = { roles: ['officer'], version: person.version };
+    const taken = { ...roles, email: 'officer2@dawnpeg.example' };
+    expect(errorsOf(await steward.put(`${people}/${person.id}`, taken).expect(422))).toEqual([
+      'email: address-taken',
+    ]);
+    await steward.put(`${people}/${person.id}`, { ...roles, email: 'Orra@example.org' }).expect(200);
+    expect(await find('Orra')).toMatchObject({ email: 'orra@example.org', active: false });
+    await steward.post(`${people}/${person.id}/code`).expect(201);
+  });
+
+  it('keeps the address that is there: nobody is given another one', async () => {
+    const { id, version, email } = await find('Irvel');
+    await steward.put(`${people}/${id}`, { roles: ['staff'], version, email: 'x@example.org' }).expect(200);
+    expect((await find('Irvel')).email).toBe(email);
+  });
+
+  it('gets no code', async () => {
+    const { person } = await add(elder);
+    const code = await steward.post(`${people}/${person.id}/code`).expect(409);
+    expect((code.body as Problem).reason).toBe('no-address');
+  });
+
+  it('comes back as who they were, into the village that they left and into no other', async () => {
+    const { person } = await add(elder);
+    const back = { ...elder, personId: person.id };
+    await steward.delete(`${people}/${person.id}`).expect(204);
+    const other = await api.signIn('steward2');
+    await other.post(`/api/communities/${other.communityId}/people`, back).expect(404);
+    expect((await add(back)).person.id).toBe(person.id);
   });
 });
 

@@ -7,9 +7,10 @@ export class PersonEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
+  /** Null for whoever has none and signs in with a card. */
   @Index('person_email', { unique: true })
-  @Column({ type: 'varchar', length: 190 })
-  email!: string;
+  @Column({ type: 'varchar', length: 190, nullable: true })
+  email!: string | null;
 
   @Column({ name: 'display_name', type: 'varchar', length: 80 })
   displayName!: string;

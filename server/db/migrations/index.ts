@@ -15,6 +15,7 @@ import { ByEar1798300000000 } from './1798300000000-by-ear.js';
 import { BeliefConsents1798400000000 } from './1798400000000-belief-consents.js';
 import { Deaths1798410000000 } from './1798410000000-deaths.js';
 import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
+import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-without-address.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -35,4 +36,5 @@ export const MIGRATIONS = [
   BeliefConsents1798400000000,
   Deaths1798410000000,
   ActualDates1798500000000,
+  PeopleWithoutAddress1798510000000,
 ];

@@ -1,6 +1,6 @@
-import { CARD_ROLES, type CardEnd } from '#shared/contracts/cards.js';
+import type { CardEnd } from '#shared/contracts/cards.js';
+import { isCardRole, type Role } from '#shared/contracts/people.js';
 import { KEPT_DAYS } from '#shared/contracts/privacy.js';
-import type { Role } from '#shared/contracts/people.js';
 import { subDays } from 'date-fns';
 import { LessThan, type EntityManager } from 'typeorm';
 import { SessionEntity } from '../../db/entities/session.entity.js';
@@ -9,7 +9,7 @@ import { recordAudit } from '../audit/audit.service.js';
 
 /** A card is weaker than a password: whoever compiles, prints or administers has none. */
 export function mayHaveCard(roles: readonly Role[]): boolean {
-  return roles.every((role) => CARD_ROLES.some((allowed) => allowed === role));
+  return roles.every(isCardRole);
 }
 
 export interface Ending {

@@ -214,7 +214,7 @@ class NeighbourRound {
     });
     return new Map(
       members.map(({ person, communityId, roles }) => [
-        person.email.replace(`@${DEMO_DOMAIN}`, ''),
+        (person.email ?? '').replace(`@${DEMO_DOMAIN}`, ''),
         { person, communityId, roles },
       ]),
     );

@@ -1,5 +1,5 @@
-import { CARD_ROLES } from '#shared/contracts/cards.js';
 import { HELPING_MINUTES, type Helpable, type HelpingInput } from '#shared/contracts/helping.js';
+import { CARD_ROLES, isCardRole } from '#shared/contracts/people.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { addMinutes } from 'date-fns';
 import { In, IsNull, Not, type DataSource } from 'typeorm';
@@ -86,7 +86,7 @@ export class HelpingService {
     if (helper.byCardIn !== undefined && helper.byCardIn !== communityId) return null;
     if (!(await manager.existsBy(MembershipEntity, { communityId, personId: helper.id }))) return null;
     const membership = await manager.findOneBy(MembershipEntity, { communityId, personId });
-    const roles = membership?.roles.filter((role) => CARD_ROLES.some((each) => each === role)) ?? [];
+    const roles = membership?.roles.filter(isCardRole) ?? [];
     const person = await manager.findOneBy(PersonEntity, { id: personId });
     if (roles.length === 0 || person === null) return null;
     if (cardId !== null && !(await manager.existsBy(SignInCardEntity, { id: cardId, liveFor: personId }))) {

@@ -29,7 +29,7 @@ export class LetterPlannerService {
     );
     for (const one of waiting) {
       const choice = choices.get(one.personId) ?? USUAL_CHOICE;
-      if (choice.channel === 'none') continue;
+      if (choice.channel === 'none' || !one.hasAddress) continue;
       const stage = await this.dueStage(one);
       if (stage === null) continue;
       const timeZone = await villageTimeZone(manager, one.communityId);

@@ -19,7 +19,7 @@ import { stillWaiting, topicOf, villageTimeZone } from './still-waiting.service.
 export const RESET_HOURS = 2;
 
 /** Why a letter is not needed any more. */
-export type DropReason = 'no-account' | 'code-void' | 'nothing-waits' | 'no-letters-wanted';
+export type DropReason = 'no-account' | 'code-void' | 'nothing-waits' | 'no-letters-wanted' | 'no-address';
 
 export interface LetterSettings {
   publicUrl: string;
@@ -27,6 +27,7 @@ export interface LetterSettings {
   from: string;
 }
 
+type Addressed = Pick<PersonEntity, 'id' | 'displayName'> & { email: string };
 type Written = { letter: OutgoingLetter } | { dropped: DropReason } | { notBefore: Date };
 
 /** Writes a letter of the outbox at the moment when it goes, and looks whether it is still needed. */
@@ -40,9 +41,12 @@ export class LetterWriterService {
   async write(row: LetterEntity): Promise<Written> {
     const person = await this.personOf(row);
     if (person === null) return { dropped: 'no-account' };
-    if (row.kind === 'invitation') return this.invitation(row, person);
-    if (row.kind === 'password-reset') return this.passwordReset(row, person);
-    return this.whatWaits(row, person);
+    if (person.email === null) return { dropped: 'no-address' };
+    const { id, displayName, email } = person;
+    const to = { id, displayName, email };
+    if (row.kind === 'invitation') return this.invitation(row, to);
+    if (row.kind === 'password-reset') return this.passwordReset(row, to);
+    return this.whatWaits(row, to);
   }
 
   private async personOf({ personId, email }: LetterEntity): Promise<PersonEntity | null> {
@@ -50,7 +54,7 @@ export class LetterWriterService {
     return this.dataSource.getRepository(PersonEntity).findOne({ where });
   }
 
-  private async invitation(row: LetterEntity, person: PersonEntity): Promise<Written> {
+  private async invitation(row: LetterEntity, person: Addressed): Promise<Written> {
     const code = await this.codeOf(row);
     if (code === null) return { dropped: 'code-void' };
     const words = invitationCode(this.settings.serverSecret, row.id);
@@ -58,7 +62,7 @@ export class LetterWriterService {
   }
 
   /** The row of the code is made now, so that asking costs the same for every address. */
-  private async passwordReset(row: LetterEntity, person: PersonEntity): Promise<Written> {
+  private async passwordReset(row: LetterEntity, person: Addressed): Promise<Written> {
     const token = resetToken(this.settings.serverSecret, row.id);
     await this.dataSource
       .createQueryBuilder()
@@ -80,7 +84,7 @@ export class LetterWriterService {
     return this.finish(row, person, `/reset#token=${token}`, 1);
   }
 
-  private async whatWaits(row: LetterEntity, person: PersonEntity): Promise<Written> {
+  private async whatWaits(row: LetterEntity, person: Addressed): Promise<Written> {
     const { manager } = this.dataSource;
     const communityId = row.communityId ?? '';
     const choice = (await letterChoicesOf(manager, [person.id])).get(person.id) ?? USUAL_CHOICE;
@@ -104,12 +108,7 @@ export class LetterWriterService {
     return code !== null && code.usedAt === null && code.expiresAt > this.clock.now() ? code : null;
   }
 
-  private async finish(
-    row: LetterEntity,
-    person: PersonEntity,
-    path: string,
-    count: number,
-  ): Promise<Written> {
+  private async finish(row: LetterEntity, person: Addressed, path: string, count: number): Promise<Written> {
     const { publicUrl, from } = this.settings;
     const community = await this.communityOf(row, person);
     const words = letterWords(translatorFor(community?.officerLanguageTag ?? 'en', 'letters'), {
@@ -130,11 +129,11 @@ export class LetterWriterService {
   }
 
   /** The village that the letter is about, or the person's first one: letters are in its second language. */
-  private async communityOf(row: LetterEntity, person: PersonEntity): Promise<CommunityEntity | null> {
+  private async communityOf(row: LetterEntity, { id: personId }: Addressed): Promise<CommunityEntity | null> {
     const { manager } = this.dataSource;
     if (row.communityId !== null) return manager.findOneBy(CommunityEntity, { id: row.communityId });
     const membership = await manager.findOne(MembershipEntity, {
-      where: { personId: person.id },
+      where: { personId },
       relations: { community: true },
       order: { community: { name: 'ASC' } },
     });

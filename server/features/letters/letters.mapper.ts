@@ -31,7 +31,7 @@ export function fromLetterChoice({ channel, rhythm, visitMe, quietHours }: Lette
 
 /** `letter` is the newest one about this; null where none was written. */
 export function toStillToAsk(
-  { version, personId, personName, does }: StillWaiting,
+  { version, personId, personName, hasAddress, does }: StillWaiting,
   choice: LetterChoiceInput,
   letter: LetterEntity | null,
 ): StillToAsk {
@@ -43,7 +43,7 @@ export function toStillToAsk(
     personId,
     personName,
     does,
-    visitMe: choice.visitMe,
+    visitMe: choice.visitMe || !hasAddress,
     letter: letter === null ? 'none' : letterState(letter.state),
     letterAt: letter?.sentAt?.toISOString() ?? null,
   };

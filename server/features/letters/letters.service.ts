@@ -62,6 +62,7 @@ export class LettersService {
       if (membership === null) throw notFound();
       if (!this.on) throw conflict('letters-off');
       if (membership.person.passwordHash !== null) throw conflict('already-active');
+      if (membership.person.email === null) throw conflict('no-address');
       const now = this.clock.now();
       const letter = { ...this.fresh(now), personId, communityId };
       await manager.update(OneTimeCodeEntity, { personId, usedAt: IsNull() }, { usedAt: now });

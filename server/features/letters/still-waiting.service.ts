@@ -13,6 +13,8 @@ export interface StillWaiting {
   communityId: string;
   personId: string;
   personName: string;
+  /** Without one nobody writes: they are visited. */
+  hasAddress: boolean;
   does: StillToAsk['does'];
 }
 
@@ -44,7 +46,8 @@ export async function stillWaiting(
     for (const { personId, roles, person } of members) {
       const does = whatWaits(personId, roles, review);
       if (does !== null) {
-        waiting.push({ version, communityId, personId, personName: person.displayName, does });
+        const { displayName: personName, email } = person;
+        waiting.push({ version, communityId, personId, personName, hasAddress: email !== null, does });
       }
     }
   }

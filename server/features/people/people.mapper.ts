@@ -42,10 +42,10 @@ export function toCommunityPerson(
   showsEmail: boolean,
 ): CommunityPerson {
   const { person } = membership;
-  const active = person.passwordHash !== null;
+  const active = person.passwordHash !== null || person.email === null;
   return {
     id: person.id,
-    email: showsEmail ? person.email : '',
+    email: showsEmail ? (person.email ?? '') : '',
     displayName: person.displayName,
     roles: membership.roles,
     active,

@@ -1,13 +1,15 @@
-import type {
-  AddedPerson,
-  CommunityPerson,
-  PersonInput,
-  PersonUpdate,
-  Role,
+import {
+  isCardRole,
+  type AddedPerson,
+  type CommunityPerson,
+  type PersonInput,
+  type PersonUpdate,
+  type Role,
 } from '#shared/contracts/people.js';
 import { addDays } from 'date-fns';
 import { randomUUID } from 'node:crypto';
 import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
+import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { GroupMemberEntity } from '../../db/entities/group-member.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -16,7 +18,7 @@ import { PersonEntity } from '../../db/entities/person.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import { hasRole, type Actor } from '../../http/actor.js';
-import { conflict, notFound, stale } from '../../http/app-error.js';
+import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { endCardOf, mayHaveCard } from '../cards/card-ends.service.js';
@@ -47,16 +49,19 @@ export class PeopleService {
     );
   }
 
-  /** A known address joins with the account it has; a new one gets a one-time code, shown only now. */
+  /**
+   * A known address joins with the account it has; a new one gets a one-time code, shown only now. Without an address
+   * somebody is new, unless they are said to be who left this very village.
+   */
   async add(actor: Actor, input: PersonInput): Promise<AddedPerson> {
     return inTransaction(this.dataSource, async (manager) => {
       await lockCommunity(manager, actor.communityId);
-      const person = (await manager.findOne(PersonEntity, { where: { email: input.email } })) ?? null;
+      const person = await this.known(manager, actor, input);
       const personId = person?.id ?? randomUUID();
       if (person === null) {
         await manager.insert(PersonEntity, {
           id: personId,
-          email: input.email,
+          email: input.email === '' ? null : input.email,
           displayName: input.displayName,
           passwordHash: null,
           isDemo: false,
@@ -72,8 +77,9 @@ export class PeopleService {
         roles: input.roles,
       });
       await this.record(manager, actor, 'person-added', personId, { roles: input.roles });
-      const code = person?.passwordHash ? null : await this.issueCode(manager, personId);
-      return { person: await this.read(manager, actor, personId), oneTimeCode: code };
+      const needsCode = input.email !== '' && !person?.passwordHash;
+      const oneTimeCode = needsCode ? await this.issueCode(manager, personId) : null;
+      return { person: await this.read(manager, actor, personId), oneTimeCode };
     });
   }
 
@@ -88,6 +94,7 @@ export class PeopleService {
         throw conflict('named-in-rule');
       }
       if (!input.roles.includes('steward')) await this.expectAnotherSteward(manager, membership);
+      await this.expectAddress(manager, membership.person, input);
       const where = { id: membership.id, version: input.version };
       const { affected } = await manager.update(MembershipEntity, where, { roles: input.roles });
       if (affected === 0) throw stale(await this.read(manager, actor, personId), input);
@@ -104,6 +111,7 @@ export class PeopleService {
     return inTransaction(this.dataSource, async (manager) => {
       const membership = await this.membership(manager, actor, personId);
       if (membership.person.passwordHash !== null) throw conflict('already-active');
+      if (membership.person.email === null) throw conflict('no-address');
       const code = await this.issueCode(manager, personId);
       await this.record(manager, actor, 'code-renewed', personId, {});
       return { person: await this.read(manager, actor, personId), oneTimeCode: code };
@@ -129,6 +137,34 @@ export class PeopleService {
     const all = await manager.find(MembershipEntity, { where: { communityId: leaving.communityId } });
     const others = all.filter((row) => row.id !== leaving.id && row.roles.includes('steward'));
     if (others.length === 0) throw conflict('last-steward');
+  }
+
+  private async known(
+    manager: EntityManager,
+    { communityId }: Actor,
+    { email, personId }: PersonInput,
+  ): Promise<PersonEntity | null> {
+    if (email !== '') return manager.findOneBy(PersonEntity, { email });
+    if (personId === undefined) return null;
+    const left = { communityId, action: 'membership-ended', subjectId: personId } as const;
+    const person = await manager.findOneBy(PersonEntity, { id: personId, email: IsNull() });
+    if (person === null || !(await manager.existsBy(AuditEventEntity, left))) throw notFound();
+    return person;
+  }
+
+  /** Whoever gets a role that signs in with a password needs an address; who has none can be given one. */
+  private async expectAddress(
+    manager: EntityManager,
+    person: PersonEntity,
+    { email, roles }: PersonUpdate,
+  ): Promise<void> {
+    if (person.email !== null) return;
+    if (email === undefined || email === '') {
+      if (!roles.every(isCardRole)) throw invalidField('email', 'address-needed');
+      return;
+    }
+    if (await manager.existsBy(PersonEntity, { email })) throw invalidField('email', 'address-taken');
+    await manager.update(PersonEntity, { id: person.id }, { email });
   }
 
   private async membership(

@@ -11,7 +11,7 @@ declare global {
   namespace Express {
     interface User {
       id: string;
-      email: string;
+      email: string | null;
       displayName: string;
       byCardIn?: string;
     }

@@ -10,7 +10,7 @@ export function toSessionState(
   helping: SessionState['helping'] | null,
 ): SessionState {
   return {
-    person: person && { id: person.id, email: person.email, displayName: person.displayName },
+    person: person && { id: person.id, email: person.email ?? '', displayName: person.displayName },
     memberships:
       person &&
       memberships.map((membership) => ({

@@ -18,6 +18,7 @@ export const texts = {
     count_other: '{{count}} people',
     you: 'you',
     notYet: 'Has not started yet',
+    byCard: 'No e-mail address: signs in with a card, and is visited.',
     codeUntil: 'The code works until {{day}}.',
     codeOver: 'The code has run out. Make a new one.',
     onlySteward: 'Only the steward of the village adds people and sets roles.',
@@ -34,9 +35,15 @@ export const texts = {
     title: 'Add a person',
     name: 'How they are called',
     email: 'E-mail address',
-    emailHint: 'They sign in with it. A letter goes to it only if you send an invitation.',
+    emailHint:
+      'They sign in with it. A letter goes to it only if you send an invitation. Elders and observers can do without: they sign in with a card, no letter comes, and you visit them.',
     roles: 'What they do here',
     submit: 'Add them',
+    added: '{{name}} belongs to the village now',
+    cardNext:
+      'Without an e-mail address {{name}} signs in with a card. Make it, print it, and hand it over yourself.',
+    toCards: 'Make the card',
+    later: 'Later',
     joined: '{{name}} has an account already and belongs to the village now.',
   },
   code: {
@@ -51,6 +58,9 @@ export const texts = {
   roles: {
     edit: 'Change roles of {{name}}',
     title: 'What {{name}} does here',
+    address: 'E-mail address',
+    addressHint:
+      'None is known. Officers, stewards and staff need one, because they sign in with a password.',
     save: 'Save the roles',
     saved: 'The roles of {{name}} are saved. They count at once.',
     stale: 'Somebody changed these roles meanwhile. They are: {{roles}}. Choose again and save.',

@@ -32,6 +32,7 @@ export const texts = {
   waitMinutes_other: 'Too many tries in a short time. Wait {{count}} minutes, then try again.',
   reason: {
     'email-known': 'Somebody of this village already has this e-mail address.',
+    'no-address': 'This person has no e-mail address. Make them a card.',
     'last-steward': 'The village needs at least one steward. Make somebody else a steward first.',
     'already-active': 'This person has a password already and needs no code.',
     'named-in-rule': 'The sign-off rule names this person. Change the rule first.',
@@ -147,6 +148,8 @@ export const texts = {
     'no-duplicates': 'Each may stand here only once.',
     'not-in-list': 'Choose one of the values that are offered.',
     'not-an-email': 'Write a whole e-mail address, such as name@example.org.',
+    'address-needed': 'Officers, stewards and staff sign in with a password, and need an address for it.',
+    'address-taken': 'Somebody has this address already.',
     'password-too-short': 'Use at least 10 characters. A short sentence is easy to remember.',
     'card-code-length': 'A card has eighteen letters and numbers. Look at it once more.',
     'pin-digits': 'A PIN has four to six numbers.',

@@ -22,9 +22,12 @@ const EMPTY: { email: string; displayName: string; roles: Role[] } = {
 export function AddPersonForm({
   communityId,
   onCode,
+  onCard,
 }: {
   communityId: string;
   onCode: (issued: IssuedCode) => void;
+  /** Somebody without an address was added: a card comes next. */
+  onCard: (name: string) => void;
 }) {
   const { t } = useTranslation('people');
   const say = useToast();
@@ -36,7 +39,8 @@ export function AddPersonForm({
     try {
       const { person, oneTimeCode } = await add.mutateAsync(values);
       form.reset(EMPTY);
-      if (oneTimeCode === null) say(t('add.joined', { name: person.displayName }));
+      if (person.email === '') onCard(person.displayName);
+      else if (oneTimeCode === null) say(t('add.joined', { name: person.displayName }));
       else onCode({ name: person.displayName, code: oneTimeCode });
     } catch (cause) {
       problems.show(cause);

@@ -45,6 +45,7 @@ function PersonRow({ person, actions }: { person: CommunityPerson; actions: Pers
           {you && <span className="text-umber-soft"> · {t('list.you')}</span>}
         </p>
         {person.email !== '' && <p className="text-umber-soft break-words">{person.email}</p>}
+        {person.email === '' && actions !== null && <p className="text-umber-soft">{t('list.byCard')}</p>}
         <p className="mt-1 flex flex-wrap gap-2">
           {person.roles.map((role) => (
             <Chip key={role}>{t(`common:role.${role}`)}</Chip>

@@ -12,6 +12,7 @@ import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { useAddPerson, useRemovePerson, useRenewCode, useSendInvitation } from '../api/people-mutations.js';
 import { peopleQuery } from '../api/people-queries.js';
 import { AddPersonForm } from './add-person-form.js';
+import { CardNextDialog } from './card-next-dialog.js';
 import { CodeDialog, type IssuedCode } from './code-dialog.js';
 import { PeopleList, type PersonActions } from './people-list.js';
 import { RolesDialog } from './roles-dialog.js';
@@ -26,6 +27,7 @@ export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) 
   const words = useProblemWords();
   const people = useQuery({ ...peopleQuery(communityId), enabled: inner });
   const [issued, setIssued] = useState<IssuedCode | null>(null);
+  const [needsCard, setNeedsCard] = useState<string | null>(null);
   const [edited, setEdited] = useState<CommunityPerson | null>(null);
   const actions = usePersonActions(communityId, setIssued, setEdited);
   usePageTitle(t('list.title'));
@@ -51,7 +53,7 @@ export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) 
         <Columns wider="first" className="mt-4">
           {list}
           <Board title={t('add.title')}>
-            <AddPersonForm communityId={communityId} onCode={setIssued} />
+            <AddPersonForm communityId={communityId} onCode={setIssued} onCard={setNeedsCard} />
           </Board>
         </Columns>
       ) : (
@@ -61,6 +63,12 @@ export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) 
         issued={issued}
         onClose={() => {
           setIssued(null);
+        }}
+      />
+      <CardNextDialog
+        name={needsCard}
+        onClose={() => {
+          setNeedsCard(null);
         }}
       />
       {edited !== null && (
@@ -92,9 +100,9 @@ function usePersonActions(
     say(words.problem(cause));
   };
 
-  const putBack = ({ email, displayName, roles }: CommunityPerson) => {
+  const putBack = ({ id, email, displayName, roles }: CommunityPerson) => {
     add.mutate(
-      { email, displayName, roles },
+      { email, displayName, roles, ...(email === '' ? { personId: id } : {}) },
       {
         onSuccess: ({ oneTimeCode }) => {
           if (oneTimeCode === null) say(t('remove.back', { name: displayName }));

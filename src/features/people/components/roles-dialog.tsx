@@ -11,6 +11,7 @@ import { listWords } from '#src/lib/list-words.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Dialog } from '#src/ui/dialog.js';
+import { TextField } from '#src/ui/field.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useSetRoles } from '../api/people-mutations.js';
@@ -31,6 +32,8 @@ export function RolesDialog({
   const say = useToast();
   const set = useSetRoles(communityId);
   const [chosen, setChosen] = useState<Role[]>(person.roles);
+  const [email, setEmail] = useState('');
+  const [emailProblem, setEmailProblem] = useState<string | undefined>();
   const [version, setVersion] = useState(person.version);
   const [said, setSaid] = useState<string | null>(null);
   const bad = rolesSchema.safeParse(chosen).error?.issues[0]?.message;
@@ -38,10 +41,17 @@ export function RolesDialog({
   const save = async () => {
     if (bad !== undefined) return;
     try {
-      await set.mutateAsync({ personId: person.id, roles: chosen, version });
+      setEmailProblem(undefined);
+      const address = email === '' ? {} : { email };
+      await set.mutateAsync({ personId: person.id, roles: chosen, ...address, version });
       say(t('roles.saved', { name: person.displayName }));
       onClose();
     } catch (cause) {
+      const refused = cause instanceof ApiProblem && cause.errors.find(({ field }) => field === 'email');
+      if (refused) {
+        setEmailProblem(words.field(refused.code, refused.message));
+        return;
+      }
       const newer =
         cause instanceof ApiProblem && cause.slug === 'stale'
           ? communityPerson.safeParse(cause.current)
@@ -72,6 +82,19 @@ export function RolesDialog({
           onChange={setChosen}
           problem={bad === undefined ? undefined : words.field(bad)}
         />
+        {person.email === '' && (
+          <TextField
+            label={t('roles.address')}
+            hint={t('roles.addressHint')}
+            problem={emailProblem}
+            type="email"
+            autoComplete="off"
+            value={email}
+            onChange={(event) => {
+              setEmail(event.currentTarget.value);
+            }}
+          />
+        )}
         <Button
           look="main"
           full
