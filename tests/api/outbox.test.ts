@@ -3,7 +3,15 @@ import { LetterEntity } from '#server/db/entities/letter.entity.js';
 import type { LetterChoice, StillToAsk } from '#shared/contracts/letters.js';
 import type { AddedPerson } from '#shared/contracts/people.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
-import { addEntry, answerAll, beginCalendar, openVillage, submit } from '#tests/support/calendar-api.js';
+import {
+  addEntry,
+  answerAll,
+  beginCalendar,
+  openVillage,
+  submit,
+  versionPath,
+} from '#tests/support/calendar-api.js';
+import { addGroup, details } from '#tests/support/sharing-api.js';
 import { linkOf, openTestPost } from '#tests/support/letters.js';
 
 const post = openTestPost();
@@ -173,6 +181,55 @@ describe('a submission', () => {
     expect(of(elder)).toMatchObject({ does: 'answer', visitMe: true, letter: 'none' });
     expect(of(elder2)).toMatchObject({ does: 'answer', visitMe: false, letter: 'sent' });
     expect(of(officer)).toBeUndefined();
+  });
+});
+
+describe('whoever keeps an entry with others', () => {
+  async function keptInReview() {
+    const village = await openVillage(api);
+    const observer = await api.signIn('observer');
+    const group = await addGroup(village.elder, 'Lamp-makers', [village.elder, observer]);
+    const calendar = await beginCalendar(village);
+    await addEntry(village.officer, calendar.id);
+    const kept = await addEntry(village.elder, calendar.id, {
+      ...{ titleOfficer: 'Lamp evening', sharingLevel: 'group' },
+      sharing: details({ groupId: group.id }),
+    });
+    const version = await submit(village.officer, calendar.id);
+    const own = `${versionPath(version)}/own-entries/${kept.id}/answer`;
+    return { ...village, observer, version, own };
+  }
+  const toObserver = () => post.sent.filter(({ to }) => to.address === 'observer@dawnpeg.example');
+
+  it('gets a letter that says only that something waits, with a link to what they keep, and is reminded', async () => {
+    const { version } = await keptInReview();
+    await round();
+    await round();
+    expect(receivers()).toEqual(['elder', 'elder2', 'elder3', 'observer']);
+    expect(toObserver().map(linkOf)).toEqual([`/calendars/${version.calendarId}/versions/1/own`]);
+    expect(JSON.stringify(post.sent)).not.toMatch(/Lamp/u);
+    at('2026-12-04T09:30:00Z');
+    await round();
+    expect(toObserver()).toHaveLength(2);
+  });
+
+  it('is written to no more once they have answered', async () => {
+    const { observer, own } = await keptInReview();
+    await round();
+    await observer.put(own, { answer: 'agree', note: '' }).expect(200);
+    at('2026-12-04T09:30:00Z');
+    await round();
+    expect(toObserver()).toHaveLength(1);
+  });
+
+  it('stands on nobody’s list: who keeps what is theirs to know', async () => {
+    const { observer, officer, steward } = await keptInReview();
+    await round();
+    for (const client of [officer, steward]) {
+      const { text } = await client.get(`/api/communities/${client.communityId}/still-to-ask`).expect(200);
+      expect(text).toContain('Elder A-2');
+      expect(text).not.toContain(observer.personId);
+    }
   });
 });
 

@@ -22,7 +22,7 @@ export class LetterPlannerService {
 
   async plan(): Promise<void> {
     const { manager } = this.dataSource;
-    const waiting = await stillWaiting(manager);
+    const waiting = await stillWaiting(manager, this.clock.now());
     const choices = await letterChoicesOf(
       manager,
       waiting.map(({ personId }) => personId),

@@ -14,7 +14,7 @@ import { invitationCode, resetToken } from './letter-secrets.js';
 import { letterWords } from './letter-words.js';
 import { USUAL_CHOICE } from './letters.mapper.js';
 import { afterQuietHours } from './quiet-hours.js';
-import { stillWaiting, topicOf, villageTimeZone } from './still-waiting.service.js';
+import { stillWaiting, topicOf, villageTimeZone, type StillWaiting } from './still-waiting.service.js';
 
 export const RESET_HOURS = 2;
 
@@ -26,6 +26,14 @@ export interface LetterSettings {
   serverSecret: string;
   from: string;
 }
+
+/** Where a submission waits for the person. */
+const PAGES = {
+  answer: '/review',
+  'answer-own': '/own',
+  'sign-as-elder': '',
+  'sign-as-steward': '',
+} as const satisfies Record<StillWaiting['does'], string>;
 
 type Addressed = Pick<PersonEntity, 'id' | 'displayName'> & { email: string };
 type Written = { letter: OutgoingLetter } | { dropped: DropReason } | { notBefore: Date };
@@ -93,13 +101,13 @@ export class LetterWriterService {
     const now = this.clock.now();
     const notBefore = afterQuietHours(now, await villageTimeZone(manager, communityId), choice.quietHours);
     if (notBefore > now) return { notBefore };
-    const waiting = (await stillWaiting(manager, { communityId, personId: person.id })).filter(
+    const waiting = (await stillWaiting(manager, now, { communityId, personId: person.id })).filter(
       (one) => row.kind === 'digest' || row.onceKey.startsWith(`${topicOf(one)}:`),
     );
     const first = waiting[0];
     if (first === undefined) return { dropped: 'nothing-waits' };
     const version = `/calendars/${first.version.calendarId}/versions/${first.version.number}`;
-    const link = first.does === 'answer' ? `${version}/review` : version;
+    const link = `${version}${PAGES[first.does]}`;
     return this.finish(row, person, row.kind === 'digest' ? '/' : link, waiting.length);
   }
 

@@ -31,7 +31,7 @@ export function fromLetterChoice({ channel, rhythm, visitMe, quietHours }: Lette
 
 /** `letter` is the newest one about this; null where none was written. */
 export function toStillToAsk(
-  { version, personId, personName, hasAddress, does }: StillWaiting,
+  { version, personId, personName, hasAddress, does }: StillWaiting & { does: StillToAsk['does'] },
   choice: LetterChoiceInput,
   letter: LetterEntity | null,
 ): StillToAsk {

@@ -15,7 +15,7 @@ import { letterChoicesOf } from './letter-choices.service.js';
 import { invitationCode } from './letter-secrets.js';
 import { RESET_HOURS } from './letter-writer.service.js';
 import { toStillToAsk, USUAL_CHOICE } from './letters.mapper.js';
-import { stillWaiting, topicOf } from './still-waiting.service.js';
+import { isTold, stillWaiting, topicOf } from './still-waiting.service.js';
 
 const INVITATION_DAYS = 3;
 /** Asking again within it makes no second letter. */
@@ -94,7 +94,9 @@ export class LettersService {
 
   async stillToAsk({ communityId }: Actor): Promise<StillToAsk[]> {
     const { manager } = this.dataSource;
-    const waiting = await stillWaiting(manager, { communityId });
+    const all = await stillWaiting(manager, this.clock.now(), { communityId });
+    // Who keeps what with whom is not told to those who ask.
+    const waiting = all.filter(isTold);
     const ids = waiting.map(({ personId }) => personId);
     const choices = await letterChoicesOf(manager, ids);
     const letters = await manager.find(LetterEntity, {

@@ -4,7 +4,12 @@ import type { EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
+import { keptEntryIds } from '../../policy/entry-sight.js';
+import { viewerOf } from '../../policy/viewer.js';
+import { countOwn } from '../reviews/own-answers.service.js';
+import { frozenContent } from '../versions/frozen-content.service.js';
 import { readReviewState } from '../versions/review-state.service.js';
+import { thingOf } from '../versions/seen-content.service.js';
 
 /** A submission that waits for a person. */
 export interface StillWaiting {
@@ -15,15 +20,17 @@ export interface StillWaiting {
   personName: string;
   /** Without one nobody writes: they are visited. */
   hasAddress: boolean;
-  does: StillToAsk['does'];
+  /** `answer-own`: for what they keep with others, which is nobody else's to know. */
+  does: StillToAsk['does'] | 'answer-own';
 }
 
 /**
- * For whom the submissions in review wait: elders with entries to answer, and whoever of the rule can sign.
- * Whoever wrote to the draft is not asked.
+ * For whom the submissions in review wait: elders with entries to answer, whoever of the rule can sign, and everybody
+ * else with entries that they keep. Whoever wrote to the draft is not asked about the draft.
  */
 export async function stillWaiting(
   manager: EntityManager,
+  now: Date,
   only: { communityId?: string; personId?: string } = {},
 ): Promise<StillWaiting[]> {
   const versions = await manager.find(CalendarVersionEntity, {
@@ -38,20 +45,36 @@ export async function stillWaiting(
   for (const version of versions) {
     const { communityId } = version.calendar;
     const review = await readReviewState(manager, version);
+    const hasKept = await keepsAny(manager, version);
     const members = await manager.find(MembershipEntity, {
       where: { communityId, ...(only.personId === undefined ? {} : { personId: only.personId }) },
       relations: { person: true },
       order: { person: { displayName: 'ASC' } },
     });
     for (const { personId, roles, person } of members) {
+      const { displayName: personName, email } = person;
+      const one = { version, communityId, personId, personName, hasAddress: email !== null };
       const does = whatWaits(personId, roles, review);
-      if (does !== null) {
-        const { displayName: personName, email } = person;
-        waiting.push({ version, communityId, personId, personName, hasAddress: email !== null, does });
-      }
+      if (does !== null) waiting.push({ ...one, does });
+      // An elder is asked about the submission as a whole.
+      if (!hasKept || roles.includes('elder')) continue;
+      const viewer = await viewerOf(manager, { person: { id: personId }, communityId, roles }, now);
+      const { answered, of } = await countOwn(manager, viewer, version);
+      if (answered < of) waiting.push({ ...one, does: 'answer-own' });
     }
   }
   return waiting;
+}
+
+/** Whom the officer and the steward see on their list. */
+export function isTold(one: StillWaiting): one is StillWaiting & { does: StillToAsk['does'] } {
+  return one.does !== 'answer-own';
+}
+
+/** Whether anything of a submission is kept at all: mostly nothing is. */
+async function keepsAny(manager: EntityManager, version: CalendarVersionEntity): Promise<boolean> {
+  const { entries } = await frozenContent(manager, version);
+  return (await keptEntryIds(manager, entries.map(thingOf))).size > 0;
 }
 
 /** What a person is asked about; the letters about it share the beginning of their key. */

@@ -10,7 +10,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { viewerOf } from '../../policy/viewer.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
@@ -49,7 +49,7 @@ export class OwnAnswersService {
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const ids = entries.map(({ entryId }) => entryId);
     await recordKeptReads(manager, viewer, this.clock.now(), 'entry', ids);
-    const given = await ownAnswers(manager, actor, entries);
+    const given = await ownAnswers(manager, actor.person.id, entries);
     return {
       year,
       placeName: place.name,
@@ -114,10 +114,9 @@ export class OwnAnswersService {
     });
     const found: OwnProgress[] = [];
     for (const version of versions) {
-      const { entries } = await ownEntriesOf(manager, viewer, version);
       const { calendarId, number } = version;
-      const answered = (await ownAnswers(manager, actor, entries)).size;
-      if (entries.length > 0) found.push({ calendarId, number, answered, of: entries.length });
+      const count = await countOwn(manager, viewer, version);
+      if (count.of > 0) found.push({ calendarId, number, ...count });
     }
     return found;
   }
@@ -136,7 +135,7 @@ export class OwnAnswersService {
       const entry = kept.find((one) => one.entryId === entryId);
       if (version === null || entry === undefined) throw notFound();
       if (version.state !== 'in-review') throw conflict('not-in-review');
-      return work(manager, entry, (await ownAnswers(manager, actor, [entry])).get(entryId));
+      return work(manager, entry, (await ownAnswers(manager, actor.person.id, [entry])).get(entryId));
     });
   }
 
@@ -158,15 +157,25 @@ export class OwnAnswersService {
   }
 }
 
+/** How many entries of a submission somebody keeps with others and may answer, and how many they have. */
+export async function countOwn(
+  manager: EntityManager,
+  viewer: Viewer,
+  version: CalendarVersionEntity,
+): Promise<{ answered: number; of: number }> {
+  const { entries } = await ownEntriesOf(manager, viewer, version);
+  return { answered: (await ownAnswers(manager, viewer.personId, entries)).size, of: entries.length };
+}
+
 /** What the person said to these very texts, by entry. */
 async function ownAnswers(
   manager: EntityManager,
-  actor: Actor,
+  elderId: string,
   entries: readonly { entryId: string; hash: string }[],
 ): Promise<Map<string, AnswerEntity>> {
   if (entries.length === 0) return new Map();
   const rows = await manager.findBy(AnswerEntity, {
-    elderId: actor.person.id,
+    elderId,
     entryHash: In(entries.map(({ hash }) => hash)),
   });
   return new Map(rows.map((row) => [row.entryId, row]));
