@@ -27,6 +27,7 @@ import { driftRoutes } from './features/drift/drift.routes.js';
 import { DriftService } from './features/drift/drift.service.js';
 import { exportsRoutes } from './features/exports/exports.routes.js';
 import { ExportsService } from './features/exports/exports.service.js';
+import { FeedsService } from './features/exports/feeds.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
@@ -250,7 +251,8 @@ export function createApp(options: AppOptions): App {
   );
   const readBack = new ReadBackService(dataSource, contents, clock);
   sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
-  exportsRoutes(mount, new ExportsService(contents));
+  const feeds = new FeedsService(dataSource, clock, contents);
+  exportsRoutes(router, mount, new ExportsService(contents), feeds);
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

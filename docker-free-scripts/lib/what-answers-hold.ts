@@ -137,6 +137,8 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   // Who says yes here says it to every use, so files to take along hold what the board holds.
   exportCalendarIcs: BOARD,
   exportCalendarCsv: BOARD,
+  // The feed of somebody who sees what the village sees, fetched by whoever has its key.
+  readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,
   readAttachment: TITLED_FILES,
@@ -189,6 +191,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   readCalendar: 'counts what the person sees',
   listVersions: 'counts what the person sees',
   listHelpable: 'names elders, and observers for keepers',
+  listFeeds: 'is ids and days, of the person alone',
   listGroups: 'names groups and, to their people, members',
   listAskedSharing: 'is levels and ids',
   readSharing: 'is levels, people and ids',

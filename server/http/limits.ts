@@ -6,6 +6,7 @@ export const BODY_LIMIT = '1mb';
 const QUARTER_HOUR_MS = 15 * 60 * 1000;
 const FAILED_TRIES_PER_ACCOUNT = 10;
 const FAILED_TRIES_PER_ADDRESS = 50;
+const FEED_FETCHES_PER_ADDRESS = 300;
 const LETTERS_PER_ACCOUNT = 5;
 const LETTERS_PER_ADDRESS = 30;
 
@@ -23,6 +24,12 @@ export function letterLimits(): RequestHandler[] {
     limit(LETTERS_PER_ADDRESS, (request) => ipKeyGenerator(request.ip ?? ''), false),
     limit(LETTERS_PER_ACCOUNT, (request) => `account:${accountOf(request)}`, false),
   ];
+}
+
+/** Addresses of calendars: guessing is slow, and a telephone that asks all the time is told to wait. */
+export function feedLimits(): RequestHandler[] {
+  const address = (request: Request) => ipKeyGenerator(request.ip ?? '');
+  return [limit(FAILED_TRIES_PER_ADDRESS, address), limit(FEED_FETCHES_PER_ADDRESS, address, false)];
 }
 
 function limit(

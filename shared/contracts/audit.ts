@@ -17,6 +17,8 @@ export const AUDIT_ACTIONS = [
   'card-made',
   'card-ended',
   'card-first-used',
+  'feed-made',
+  'feed-ended',
   'letters-chosen',
   'invitation-sent',
   'community-founded',

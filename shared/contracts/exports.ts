@@ -1,6 +1,6 @@
 import { z } from 'zod';
-import { id, queryNumber } from './common.js';
-import { defineEndpoint, member } from './endpoint.js';
+import { id, instant, isoDate, listOf, queryNumber } from './common.js';
+import { anybody, defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
 import { versionNumber } from './versions.js';
 
@@ -16,6 +16,21 @@ export type IcsQuery = z.infer<typeof icsQuery>;
 export const csvQuery = z.strictObject({ mark: z.enum(['yes', 'no']).default('yes') });
 export type CsvQuery = z.infer<typeof csvQuery>;
 
+/** Addresses that one person has in one village, for as many devices. */
+export const FEEDS_MAX = 5;
+
+export const feed = z.strictObject({
+  id,
+  madeAt: instant,
+  /** The village's day on which something last fetched it; null where nothing has. */
+  fetchedOn: isoDate.nullable(),
+});
+export type Feed = z.infer<typeof feed>;
+/** With the key, which is shown once. */
+export const madeFeed = feed.extend({ key: z.string() });
+export type MadeFeed = z.infer<typeof madeFeed>;
+
+const communityParams = z.strictObject({ communityId: id });
 const params = z.strictObject({ calendarId: id, number: versionNumber });
 
 /** What leaves the calendar as a file: open and the village's entries that were agreed to be handed on. */
@@ -39,5 +54,44 @@ export const exportsEndpoints = {
     params,
     query: csvQuery,
     fileType: 'text/csv',
+  }),
+  listFeeds: defineEndpoint({
+    id: 'listFeeds',
+    method: 'GET',
+    path: '/api/communities/:communityId/feeds',
+    summary: 'The own addresses under which a telephone fetches the calendar, without their keys',
+    access: member('community', ...ROLES),
+    params: communityParams,
+    response: listOf(feed),
+  }),
+  makeFeed: defineEndpoint({
+    id: 'makeFeed',
+    method: 'POST',
+    path: '/api/communities/:communityId/feeds',
+    summary: 'Make an address for a telephone; its key is shown once',
+    access: member('community', ...ROLES),
+    params: communityParams,
+    response: madeFeed,
+    status: 201,
+    // It goes on when the card that signed somebody in has ended.
+    needsPassword: true,
+  }),
+  endFeed: defineEndpoint({
+    id: 'endFeed',
+    method: 'DELETE',
+    path: '/api/communities/:communityId/feeds/:feedId',
+    summary: 'End an own address; one that is ended already stays so',
+    access: member('community', ...ROLES),
+    params: communityParams.extend({ feedId: id }),
+  }),
+  readFeed: defineEndpoint({
+    id: 'readFeed',
+    method: 'GET',
+    // The key stands in the query, because paths are written into logs.
+    path: '/api/feed.ics',
+    summary: 'What is published, as its person may have it today; for whoever has the key',
+    access: anybody,
+    query: z.strictObject({ key: z.string().max(200) }),
+    fileType: 'text/calendar',
   }),
 } as const;

@@ -11,6 +11,7 @@ import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
 import { ENDPOINTS } from '#shared/contracts/index.js';
 import { ROLES, type AddedPerson, type Community, type Role } from '#shared/contracts/people.js';
+import type { MadeFeed } from '#shared/contracts/exports.js';
 import type { Place } from '#shared/contracts/places.js';
 import { DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -48,6 +49,7 @@ interface Village {
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
   groupId: string;
+  feedKey: string;
   variantId: string;
   /** A note of somebody who calls nothing here. */
   noteId: string;
@@ -174,14 +176,16 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
     itemType: 'entry',
     itemId: endpoint.id === 'removeSound' ? village.attachmentId : village.entryId,
     markerKey: 'pleiades',
+    feedId: randomUUID(),
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
   };
 }
 
-function queryOf(endpoint: Endpoint, { publishedNumber, figureId }: Village): string {
+function queryOf(endpoint: Endpoint, { publishedNumber, figureId, feedKey }: Village): string {
   const queries: Record<string, string> = {
     findTimeZone: '?latitudeDeg=12&longitudeDeg=39',
+    readFeed: `?key=${feedKey}`,
     listStars: '?year=2027',
     exportStarsCsv: '?year=2027',
     readStar: '?year=2027',
@@ -314,6 +318,8 @@ async function furnishOwn(): Promise<Village> {
   const people = `/api/communities/${village.steward.communityId}/people`;
   const added = (await village.steward.post(people, guest).expect(201)).body as AddedPerson;
   const figureId = (await addFigure(village.officer)).id;
+  const feeds = `/api/communities/${village.officer.communityId}/feeds`;
+  const feed = (await village.officer.post(feeds).expect(201)).body as MadeFeed;
   return {
     ...(await homeOf(village.officer)),
     calendarId: calendar.id,
@@ -322,6 +328,7 @@ async function furnishOwn(): Promise<Village> {
     personId: added.person.id,
     figureId,
     attachmentId: (await addPicture(village.elder, figureId)).id,
+    feedKey: feed.key,
     withdrawalId: await aWithdrawal(village.officer.communityId),
     variantId,
     noteId: await aNote(village.officer, figureId),
@@ -350,6 +357,7 @@ async function furnishOther(): Promise<Village> {
     personId: officer.personId,
     figureId,
     attachmentId: (await addPicture(officer, figureId)).id,
+    feedKey: '',
     withdrawalId: await aWithdrawal(home.community.id),
     variantId,
     noteId: await aNote(officer, figureId),

@@ -123,6 +123,7 @@ describe('leaving for good', () => {
           'session',
           'one_time_code',
           'sign_in_card',
+          'calendar_feed',
           'letter',
           'letter_choice',
         ].includes(table)

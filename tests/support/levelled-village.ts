@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { ConsentContent } from '#shared/contracts/consents.js';
+import type { MadeFeed } from '#shared/contracts/exports.js';
 import type { FigureInput } from '#shared/contracts/figures.js';
 import { PLAIN_DETAILS, SHARED_ITEM_TYPES, type SharingChange } from '#shared/contracts/sharing.js';
 import type { Version } from '#shared/contracts/versions.js';
@@ -145,6 +146,8 @@ export async function furnishLevels(
     text: plant('note', plainAt('elders')),
   });
   const consentIds = await settleConsents(elder, entries, figures, plant);
+  const feed = (await village.observer.post(`/api/communities/${officer.communityId}/feeds`).expect(201))
+    .body as MadeFeed;
   const askedFigures = figures.filter(isAskedFigure);
   const sealed = expectFound(entries, plainAt('sealed'));
   const numbers = [String(published.number), String(reviewed.number)];
@@ -200,6 +203,7 @@ export async function furnishLevels(
       listSkylineEffects: ['?year=2027'],
       listSkyMarkers: ['?year=2027'],
       readStarAir: ['?year=2027'],
+      readFeed: [`?key=${feed.key}`],
       readMoons: moonsBy(askedFigures),
       exportMoonsCsv: moonsBy(askedFigures),
       findMarkers: ['?year=2027&from=06-10'],

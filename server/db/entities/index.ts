@@ -3,6 +3,7 @@ import { AttachmentEntity } from './attachment.entity.js';
 import { AttachmentPartEntity } from './attachment-part.entity.js';
 import { AttachmentWordsEntity } from './attachment-words.entity.js';
 import { AuditEventEntity } from './audit-event.entity.js';
+import { CalendarFeedEntity } from './calendar-feed.entity.js';
 import { CalendarVersionEntity } from './calendar-version.entity.js';
 import { CalendarEntity } from './calendar.entity.js';
 import { CommunityEntity } from './community.entity.js';
@@ -47,6 +48,7 @@ export const ENTITIES = [
   EntryEntity,
   DeathEntity,
   DraftContributionEntity,
+  CalendarFeedEntity,
   CalendarVersionEntity,
   VersionEntryEntity,
   AnswerEntity,

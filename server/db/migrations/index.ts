@@ -16,6 +16,7 @@ import { BeliefConsents1798400000000 } from './1798400000000-belief-consents.js'
 import { Deaths1798410000000 } from './1798410000000-deaths.js';
 import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
 import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-without-address.js';
+import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -37,4 +38,5 @@ export const MIGRATIONS = [
   Deaths1798410000000,
   ActualDates1798500000000,
   PeopleWithoutAddress1798510000000,
+  CalendarFeeds1798600000000,
 ];

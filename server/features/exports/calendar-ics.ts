@@ -37,31 +37,54 @@ interface Event {
  * @param alarmDays how many days ahead a telephone reminds; null for never
  */
 export function calendarIcs(content: CalendarContent, alarmDays: number | null): string {
-  const { header, entries, state, label } = content;
-  const texts = textsFor(header.year);
-  const issue = label ?? texts.files(`ics.state.${state ?? 'draft'}`);
+  const { header, state, label } = content;
+  const { files } = textsFor(header.year);
+  const issue = label ?? files(`ics.state.${state ?? 'draft'}`);
   const about = { community: header.communityName, place: header.place.name, year: header.year, issue };
-  const events = [
-    ...entries.flatMap((entry) => eventOfEntry(entry, header.calendarId, texts)),
-    ...eventsOfMarkers(entries, header.markers, header.calendarId, texts),
-  ].sort((a, b) => (a.from === b.from ? compare(a.uid, b.uid) : compare(a.from, b.from)));
-  const frame = {
-    stamp: icalInstant(header.submittedAt),
-    sequence: String(header.number),
-    status: state === 'published' ? 'CONFIRMED' : 'TENTATIVE',
-    alarmDays,
-  };
+  const words = { name: files('ics.name', about), about: files('ics.about', about) };
+  return wholeFile(words, eventLines(content, alarmDays));
+}
+
+/** Several calendars of one village in one file, for a telephone that fetches it again and again. */
+export function calendarsIcs(contents: readonly CalendarContent[]): string {
+  const { files } = textsFor(contents[0]?.header.year ?? 0);
+  const about = { community: contents[0]?.header.communityName ?? '' };
+  const words = { name: files('ics.feedName', about), about: files('ics.feedAbout', about) };
+  return wholeFile(
+    words,
+    contents.flatMap((content) => eventLines(content, null)),
+  );
+}
+
+function wholeFile(words: { name: string; about: string }, events: readonly IcalLine[]): string {
+  const caution = translatorFor(DEFAULT_LANGUAGE, 'files')('caution');
   return icalText([
     ['BEGIN', 'VCALENDAR'],
     ['VERSION', '2.0'],
     ['PRODID', '-//Dawnpeg//Village calendar//EN'],
     ['CALSCALE', 'GREGORIAN'],
     ['METHOD', 'PUBLISH'],
-    ['X-WR-CALNAME', icalWords(texts.files('ics.name', about))],
-    ['X-WR-CALDESC', icalWords([texts.files('ics.about', about), texts.files('caution')].join(' '))],
-    ...events.flatMap((event) => linesOf(event, frame)),
+    ['X-WR-CALNAME', icalWords(words.name)],
+    ['X-WR-CALDESC', icalWords([words.about, caution].join(' '))],
+    ...events,
     ['END', 'VCALENDAR'],
   ]);
+}
+
+function eventLines({ header, entries, state }: CalendarContent, alarmDays: number | null): IcalLine[] {
+  const texts = textsFor(header.year);
+  const frame = {
+    stamp: icalInstant(header.submittedAt),
+    sequence: String(header.number),
+    status: state === 'published' ? 'CONFIRMED' : 'TENTATIVE',
+    alarmDays,
+  };
+  return [
+    ...entries.flatMap((entry) => eventOfEntry(entry, header.calendarId, texts)),
+    ...eventsOfMarkers(entries, header.markers, header.calendarId, texts),
+  ]
+    .sort((a, b) => (a.from === b.from ? compare(a.uid, b.uid) : compare(a.from, b.from)))
+    .flatMap((event) => linesOf(event, frame));
 }
 
 function textsFor(year: number): Texts {

@@ -1,9 +1,20 @@
 import { exportsEndpoints } from '#shared/contracts/exports.js';
-import { FileReply } from '../../http/file-reply.js';
+import type { Router } from 'express';
+import { FileReply, StoredFileReply } from '../../http/file-reply.js';
+import { feedLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
+import { wholeList } from '../../http/reply.js';
 import type { ExportsService } from './exports.service.js';
+import type { FeedsService } from './feeds.service.js';
 
-export function exportsRoutes(mount: Mount, files: ExportsService): void {
+export function exportsRoutes(
+  router: Router,
+  mount: Mount,
+  files: ExportsService,
+  feeds: FeedsService,
+): void {
+  router.get(exportsEndpoints.readFeed.path, ...feedLimits());
+
   mount.forMember(exportsEndpoints.ics, async ({ params, query }, actor) => {
     const { content, fileName } = await files.ics(actor, params.calendarId, params.number, query);
     return new FileReply(content, fileName);
@@ -12,4 +23,14 @@ export function exportsRoutes(mount: Mount, files: ExportsService): void {
     const { content, fileName } = await files.csv(actor, params.calendarId, params.number, query);
     return new FileReply(content, fileName);
   });
+  mount.forMember(exportsEndpoints.listFeeds, async (_call, actor) => wholeList(await feeds.list(actor)));
+  mount.forMember(exportsEndpoints.makeFeed, (_call, actor) => feeds.make(actor));
+  mount.forMember(exportsEndpoints.endFeed, async ({ params }, actor) => {
+    await feeds.end(actor, params.feedId);
+    return undefined;
+  });
+  mount.forAnybody(
+    exportsEndpoints.readFeed,
+    async ({ query }) => new StoredFileReply(await feeds.fetch(query.key)),
+  );
 }

@@ -34,6 +34,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   session: row('signing-in', ['person_id'], ['expires_at', 'card_id']),
   one_time_code: row('signing-in', ['person_id'], 'all', ['code_hash']),
   sign_in_card: row('signing-in', ['person_id', 'made_by', 'live_for'], ['id', 'community_id', 'made_by']),
+  calendar_feed: row('signing-in', ['person_id'], 'all', ['key_hash']),
   letter: row('letters', ['person_id'], ['id', 'created_at']),
   letter_choice: row('letters', ['person_id'], 'all'),
   place: row('places', [], []),

@@ -2,6 +2,7 @@ import type { LeavingInput } from '#shared/contracts/privacy.js';
 import { en } from '#shared/locales/index.js';
 import { In, Not, type DataSource, type EntityManager } from 'typeorm';
 import { GroupMemberEntity } from '../../db/entities/group-member.entity.js';
+import { CalendarFeedEntity } from '../../db/entities/calendar-feed.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
 import { LetterChoiceEntity } from '../../db/entities/letter-choice.entity.js';
@@ -110,6 +111,7 @@ export class LeavingService {
     await manager.delete(LetterChoiceEntity, { personId });
     await manager.delete(OneTimeCodeEntity, { personId });
     await manager.delete(SignInCardEntity, { personId });
+    await manager.delete(CalendarFeedEntity, { personId });
     await endSessionsOf(manager, personId);
     const gone = {
       email: `${personId}@left.invalid`,

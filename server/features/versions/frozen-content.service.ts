@@ -55,6 +55,16 @@ export class FrozenContentService {
 
   /** `number` is a submission number or `draft`. What the person may not see is not there. */
   async read(actor: Actor, calendarId: string, number: string): Promise<CalendarContent> {
+    const content = await this.cutToReader(actor, calendarId, number);
+    if (number === 'draft') return content;
+    const { manager } = this.dataSource;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const ids = content.entries.map(({ entryId }) => entryId);
+    await recordKeptReads(manager, viewer, this.clock.now(), 'entry', ids);
+    return content;
+  }
+
+  private async cutToReader(actor: Actor, calendarId: string, number: string): Promise<CalendarContent> {
     const { manager } = this.dataSource;
     if (number === 'draft') {
       if (!seesDrafts(actor)) throw notFound();
@@ -64,13 +74,6 @@ export class FrozenContentService {
     const frozen = await frozenContent(manager, version);
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const { header, entries } = await seenOfVersion(manager, viewer, version, frozen.header, frozen.entries);
-    await recordKeptReads(
-      manager,
-      viewer,
-      this.clock.now(),
-      'entry',
-      entries.map(({ entryId }) => entryId),
-    );
     const { label, state, hash } = version;
     return { header, entries: entries.map(bodyOf), number: version.number, label, state, hash };
   }
@@ -80,7 +83,7 @@ export class FrozenContentService {
     return this.readForUse(actor, calendarId, number, 'print');
   }
 
-  /** Open and the village's entries that were agreed to be used so, whoever takes them along. */
+  /** Open and the village's entries that were agreed to be used so; nothing kept, so no reading of it is noted. */
   async readForUse(
     actor: Actor,
     calendarId: string,
@@ -88,7 +91,7 @@ export class FrozenContentService {
     use: ConsentUse,
   ): Promise<CalendarContent> {
     const { manager } = this.dataSource;
-    const content = await this.read(actor, calendarId, number);
+    const content = await this.cutToReader(actor, calendarId, number);
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const shown = await entriesForVillage(manager, viewer, content.entries);
     const entries = await entriesForUse(manager, viewer.today, use, shown);

@@ -23,6 +23,8 @@ export const texts = {
     'card-made': '{{actor}} made a sign-in card for {{subject}}.',
     'card-ended': 'The sign-in card of {{subject}} ended: {{why}}.',
     'card-first-used': '{{subject}} used their sign-in card for the first time.',
+    'feed-made': '{{actor}} made an address for the calendar of a telephone.',
+    'feed-ended': '{{actor}} ended an address for the calendar of a telephone.',
     'letters-chosen': '{{actor}} chose how to be asked.',
     'invitation-sent': '{{actor}} sent {{subject}} an invitation by e-mail.',
     'community-founded': '{{actor}} set up {{subject}}.',

@@ -124,6 +124,8 @@ export const texts = {
     fileName: '{{community}} {{issue}} calendar',
     name: '{{community}} {{issue}}',
     about: 'Calendar of {{community}} for {{place}}, {{year}}, {{issue}}.',
+    feedName: '{{community}}: the village’s calendar',
+    feedAbout: 'What is published of the calendar of {{community}}, as it stands today.',
     state: {
       draft: 'draft',
       'in-review': 'in review',

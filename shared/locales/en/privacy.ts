@@ -15,9 +15,9 @@ export const texts = {
     },
     'signing-in': {
       name: 'Signing in',
-      what: 'Where a person is signed in, codes and cards to come in with.',
+      what: 'Where a person is signed in, codes and cards to come in with, addresses for the calendars of their telephones.',
       until:
-        'Sessions for {{session}} days without use; codes, links and cards for {{endedWayIn}} days after their end.',
+        'Sessions for {{session}} days without use; codes, links and cards for {{endedWayIn}} days after their end; addresses until they are ended.',
     },
     letters: {
       name: 'Letters',

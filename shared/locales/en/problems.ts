@@ -110,6 +110,8 @@ export const texts = {
     'pin-not-chosen': 'This card has no PIN yet. Choose one first.',
     'card-locked': 'Five wrong PINs: the card is locked for a quarter of an hour. Wait, then try again.',
     'card-not-yours': 'This is somebody else’s card. Only they and the steward can end it.',
+    'too-many-feeds':
+      'There are as many addresses as there can be. End one that is not needed, then make a new one.',
     'card-too-weak': 'A card is for elders and observers only. This role signs in with a password.',
     'rule-impossible': 'There are fewer elders in the village than the rule asks for.',
   },
