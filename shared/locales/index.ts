@@ -7,6 +7,7 @@ import { texts as cards } from './en/cards.js';
 import { texts as common } from './en/common.js';
 import { texts as consents } from './en/consents.js';
 import { texts as drift } from './en/drift.js';
+import { texts as exports } from './en/exports.js';
 import { texts as figures } from './en/figures.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
@@ -50,6 +51,7 @@ export const en = {
   stars,
   finder,
   drift,
+  exports,
   moons,
   air,
   figures,

@@ -94,7 +94,7 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.version,
-    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing'],
+    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing', 'exports'],
     load: () => import('./routes/version.js'),
   },
   {

@@ -1,4 +1,6 @@
 import { AboutEntryButton } from '#src/app/items/about-entry.js';
+import { FeedsBoard } from '#src/features/exports/components/feeds-board.js';
+import { TakeAlongBoard } from '#src/features/exports/components/take-along-board.js';
 import { ReviewBoard } from '#src/features/reviews/components/review-board.js';
 import { VersionPage } from '#src/features/versions/components/version-page.js';
 
@@ -7,6 +9,12 @@ export function Component() {
     <VersionPage
       review={(version) => <ReviewBoard version={version} />}
       about={(entry) => <AboutEntryButton entry={entry} />}
+      takeAlong={({ calendarId, number, state }, communityId) => (
+        <>
+          <TakeAlongBoard calendarId={calendarId} number={number} isPublished={state === 'published'} />
+          {state === 'published' && <FeedsBoard communityId={communityId} />}
+        </>
+      )}
     />
   );
 }

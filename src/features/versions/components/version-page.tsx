@@ -33,15 +33,17 @@ interface VersionPageProps {
   review?: ((version: Version) => ReactNode) | undefined;
   /** The way to what belongs to an entry: notes, voices, who may see it. */
   about?: ((entry: VersionEntry) => ReactNode) | undefined;
+  /** The ways in which it leaves the house; they belong to the exports. */
+  takeAlong?: ((version: Version, communityId: string) => ReactNode) | undefined;
 }
 
 /** A version as it was frozen, what is missing before it is signed off, and what can be done with it. */
-export function VersionPage({ review, about }: VersionPageProps) {
+export function VersionPage({ review, about, takeAlong }: VersionPageProps) {
   const { calendarId = '', number = '' } = useParams();
   const isNumber = submissionNumber.safeParse(number).success;
   // "draft" is no frozen version: its page is the editor.
   if (!isNumber) return <Navigate to={paths.calendar(calendarId)} replace />;
-  return <FrozenVersion calendarId={calendarId} number={Number(number)} review={review} about={about} />;
+  return <FrozenVersion {...{ calendarId, review, about, takeAlong }} number={Number(number)} />;
 }
 
 interface FrozenVersionProps extends VersionPageProps {
@@ -49,7 +51,7 @@ interface FrozenVersionProps extends VersionPageProps {
   number: number;
 }
 
-function FrozenVersion({ calendarId, number, review, about }: FrozenVersionProps) {
+function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenVersionProps) {
   const { t } = useTranslation('versions');
   // Asked for together: one after the other would be three ways to the server.
   const [{ data: calendar }, { data: version }, { data: versions }] = useSuspenseQueries({
@@ -83,6 +85,7 @@ function FrozenVersion({ calendarId, number, review, about }: FrozenVersionProps
         </EntryTitles>
         <div className="grid gap-4">
           {isOpen && <SignaturesBoard version={version} />}
+          {takeAlong?.(version, calendar.communityId)}
           <BasisBoard header={version.header} />
           <SealBoard version={version} />
         </div>
