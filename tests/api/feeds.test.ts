@@ -103,6 +103,14 @@ describe('the address of a telephone', () => {
     await fetched(feed).expect(404);
     expect(await api.dataSource.getRepository(CalendarFeedEntity).count()).toBe(1);
   });
+
+  it('is wiped where the steward ends the membership', async () => {
+    const feed = await make(staff);
+    const { steward } = village;
+    await steward.delete(`/api/communities/${steward.communityId}/people/${staff.personId}`).expect(204);
+    expect(await api.dataSource.getRepository(CalendarFeedEntity).count()).toBe(0);
+    await fetched(feed).expect(404);
+  });
 });
 
 describe('what a telephone fetches is decided anew each time', () => {

@@ -10,6 +10,7 @@ import { addDays } from 'date-fns';
 import { randomUUID } from 'node:crypto';
 import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
 import { AuditEventEntity } from '../../db/entities/audit-event.entity.js';
+import { CalendarFeedEntity } from '../../db/entities/calendar-feed.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { GroupMemberEntity } from '../../db/entities/group-member.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -127,6 +128,7 @@ export class PeopleService {
       await manager.delete(MembershipEntity, { id: membership.id });
       const groups = await manager.findBy(VillageGroupEntity, { communityId: actor.communityId });
       await manager.delete(GroupMemberEntity, { personId, groupId: In(groups.map(({ id }) => id)) });
+      await manager.delete(CalendarFeedEntity, { personId, communityId: actor.communityId });
       await this.endCard(manager, actor, personId, 'left');
       await this.record(manager, actor, 'membership-ended', personId, { roles: membership.roles });
     });
