@@ -50,6 +50,8 @@ import { notesRoutes } from './features/notes/notes.routes.js';
 import { NotesService } from './features/notes/notes.service.js';
 import { moonsRoutes } from './features/moons/moons.routes.js';
 import { MoonsService } from './features/moons/moons.service.js';
+import { rolloversRoutes } from './features/rollovers/rollovers.routes.js';
+import { RolloversService } from './features/rollovers/rollovers.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
 import { OwnAnswersService } from './features/reviews/own-answers.service.js';
 import { reviewsRoutes } from './features/reviews/reviews.routes.js';
@@ -231,6 +233,7 @@ export function createApp(options: AppOptions): App {
   const publishing = new PublishingService(dataSource, clock, contents, versions);
   const calendars = new CalendarsService(dataSource, clock);
   calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
+  rolloversRoutes(mount, new RolloversService(dataSource, clock, sky));
   notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(mount, versions, publishing, new ComparisonService(contents));

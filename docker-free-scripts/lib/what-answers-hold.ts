@@ -125,6 +125,9 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   readFigure: { figure: sees, story: sees, 'led entry': keptSeen },
   listEntries: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
   listVariants: { variant: keptSeen, 'kept variant': keptSeen },
+  // The officer who rolled over neither sees nor counts what is kept.
+  readRollover: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
+  listVariants: { variant: keptSeen },
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
   listAnswers: { answer: keptSeen },

@@ -41,17 +41,21 @@ export async function lockSharing(
   });
 }
 
-/** A copy of a thing is shared as the thing is. */
+/** A copy of a thing is shared as the thing is, and hidden where it is paused. */
 export async function copySharing(
   manager: EntityManager,
   itemType: SharedItemType,
   fromId: string,
   itemId: string,
 ): Promise<void> {
-  const { communityId, level, details, giverId } = await manager.findOneByOrFail(ItemSharingEntity, {
-    itemType,
-    itemId: fromId,
-  });
-  await insertSharing(manager, { itemType, itemId, communityId, level, details, giverId });
+  const { communityId, level, details, giverId, state, stateAt } = await manager.findOneByOrFail(
+    ItemSharingEntity,
+    {
+      itemType,
+      itemId: fromId,
+    },
+  );
+  const copy = { itemType, itemId, communityId, level, details, giverId, state, stateAt };
+  await manager.insert(ItemSharingEntity, { ...copy, asked: null });
   if (itemType === 'entry') await copyConsents(manager, itemType, fromId, itemId);
 }

@@ -57,6 +57,7 @@ export const AUDIT_ACTIONS = [
   'consent-changed',
   'consent-withdrawn',
   'calendar-begun',
+  'calendar-rolled-over',
   'entry-added',
   'entry-changed',
   'entry-copied',

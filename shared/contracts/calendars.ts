@@ -251,6 +251,8 @@ export const calendar = z.strictObject({
   published: z.strictObject({ number: z.number().int(), label: z.string() }).nullable(),
   entryCount: z.number().int(),
   updatedAt: instant,
+  /** Of a draft that began as this year’s and was never submitted, for those who see it: what changed can be read. */
+  rolledFromYear: z.number().int().optional(),
 });
 export type Calendar = z.infer<typeof calendar>;
 

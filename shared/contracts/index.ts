@@ -21,6 +21,7 @@ import { peopleEndpoints } from './people.js';
 import { placesEndpoints } from './places.js';
 import { privacyEndpoints } from './privacy.js';
 import { reviewsEndpoints } from './reviews.js';
+import { rolloversEndpoints } from './rollovers.js';
 import { sessionEndpoints } from './session.js';
 import { sharingEndpoints } from './sharing.js';
 import { sheetsEndpoints } from './sheets.js';
@@ -52,6 +53,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   figuresEndpoints,
   calendarsEndpoints,
   actualDaysEndpoints,
+  rolloversEndpoints,
   variantsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

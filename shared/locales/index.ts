@@ -23,6 +23,7 @@ import { texts as privacy } from './en/privacy.js';
 import { texts as problems } from './en/problems.js';
 import { texts as record } from './en/record.js';
 import { texts as reviews } from './en/reviews.js';
+import { texts as rollovers } from './en/rollovers.js';
 import { texts as session } from './en/session.js';
 import { texts as sharing } from './en/sharing.js';
 import { texts as sheets } from './en/sheets.js';
@@ -58,6 +59,7 @@ export const en = {
   calendars,
   record,
   reviews,
+  rollovers,
   sharing,
   consents,
   sheets,

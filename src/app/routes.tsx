@@ -81,7 +81,11 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['consents', 'sharing', 'attachments'],
     load: () => import('./routes/item-consents.js'),
   },
-  { path: PATTERNS.calendars, texts: ['calendars', 'sky'], load: () => import('./routes/calendars.js') },
+  {
+    path: PATTERNS.calendars,
+    texts: ['calendars', 'sky', 'rollovers'],
+    load: () => import('./routes/calendars.js'),
+  },
   {
     path: PATTERNS.calendar,
     texts: ['calendars', 'versions', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
@@ -101,6 +105,11 @@ export const villageRoutes: readonly AppRoute[] = [
     path: PATTERNS.compare,
     texts: ['versions', 'calendars', 'sky'],
     load: () => import('./routes/compare.js'),
+  },
+  {
+    path: PATTERNS.rollover,
+    texts: ['rollovers', 'calendars', 'sky'],
+    load: () => import('./routes/rollover.js'),
   },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {

@@ -40,6 +40,7 @@ export const PATTERNS = {
   ownEntries: '/calendars/:calendarId/versions/:number/own',
   meeting: '/calendars/:calendarId/versions/:number/meeting',
   compare: '/calendars/:calendarId/compare',
+  rollover: '/calendars/:calendarId/rollover',
   sheet: '/calendars/:calendarId/sheet',
   takeBack: '/take-back/:communityId/:itemType/:itemId',
 } as const;
@@ -127,6 +128,8 @@ export const paths = {
   ownEntries: (calendarId: string, number: VersionNumber) => `${versionPath(calendarId, number)}/own`,
   compare: (calendarId: string, query: { from?: VersionNumber; to?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/compare`, query),
+  /** What the new year changed in a draft that was rolled over. */
+  rollover: (calendarId: string) => `${calendarPath(calendarId)}/rollover`,
   sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/sheet`, query),
   takeBack: (communityId: string, itemType: SharedItemType, itemId: string) =>

@@ -41,6 +41,8 @@ interface Village {
   community: Community;
   place: Place;
   calendarId: string;
+  /** A draft that was rolled over and never submitted. */
+  rolledId: string;
   entryId: string;
   /** In review, and kept by everybody who calls here. */
   ownEntryId: string;
@@ -162,7 +164,7 @@ function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Reco
   return {
     communityId: village.community.id,
     placeId: village.place.id,
-    calendarId: village.calendarId,
+    calendarId: endpoint.id === 'readRollover' ? village.rolledId : village.calendarId,
     entryId: OF_ITS_PEOPLE.has(endpoint.id) ? village.ownEntryId : village.entryId,
     personId: village.personId,
     figureId: village.figureId,
@@ -323,6 +325,7 @@ async function furnishOwn(): Promise<Village> {
   return {
     ...(await homeOf(village.officer)),
     calendarId: calendar.id,
+    rolledId: await rolledFrom(village.officer, calendar.id),
     entryId: entry.id,
     ownEntryId: kept.id,
     personId: added.person.id,
@@ -352,6 +355,7 @@ async function furnishOther(): Promise<Village> {
   return {
     ...home,
     calendarId: calendar.id,
+    rolledId: await rolledFrom(officer, calendar.id),
     entryId: entry.id,
     ownEntryId: entry.id,
     personId: officer.personId,
@@ -367,6 +371,11 @@ async function furnishOther(): Promise<Village> {
     publishedNumber: number,
     reviewedNumber: number,
   };
+}
+
+async function rolledFrom(officer: Client, calendarId: string): Promise<string> {
+  const answer = await officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
+  return (answer.body as { calendarId: string }).calendarId;
 }
 
 async function aNote(officer: Client, figureId: string): Promise<string> {

@@ -178,12 +178,13 @@ describe('a withdrawn entry', () => {
   });
 
   async function placesWith(word: string): Promise<string[]> {
+    const rolled = await village.officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
     const found = [...(await tablesWith(api, word)), ...filesWith(api, word)];
     const askable = {
       params: {
         communityId: [village.officer.communityId],
         placeId: [village.placeId],
-        calendarId: [calendarId],
+        calendarId: [calendarId, (rolled.body as { calendarId: string }).calendarId],
         entryId: [entry.id],
         number: ['1', 'draft'],
         figureId: [entry.id],

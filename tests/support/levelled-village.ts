@@ -4,6 +4,7 @@ import type { ConsentContent } from '#shared/contracts/consents.js';
 import type { MadeFeed } from '#shared/contracts/exports.js';
 import type { FigureInput } from '#shared/contracts/figures.js';
 import { PLAIN_DETAILS, SHARED_ITEM_TYPES, type SharingChange } from '#shared/contracts/sharing.js';
+import type { RolledCalendar } from '#shared/contracts/rollovers.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { LEVELS, type Combination } from '../../docker-free-scripts/lib/visibility-rules.js';
 import {
@@ -148,6 +149,8 @@ export async function furnishLevels(
   const consentIds = await settleConsents(elder, entries, figures, plant);
   const feed = (await village.observer.post(`/api/communities/${officer.communityId}/feeds`).expect(201))
     .body as MadeFeed;
+  const rolled = await officer.post(`/api/calendars/${calendar.id}/next-year`).expect(200);
+  const rolledId = (rolled.body as RolledCalendar).calendarId;
   const askedFigures = figures.filter(isAskedFigure);
   const sealed = expectFound(entries, plainAt('sealed'));
   const numbers = [String(published.number), String(reviewed.number)];
@@ -172,6 +175,8 @@ export async function furnishLevels(
       ...variantIds.map((id) => ({ itemType: 'variant', itemId: id })),
     ],
     only: {
+      readRollover: { calendarId: [rolledId] },
+      listEntries: { calendarId: [calendar.id, rolledId] },
       printSheet: { number: [numbers[0] ?? '', 'draft'] },
       previewSheet: { number: numbers },
     },

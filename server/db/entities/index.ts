@@ -25,6 +25,8 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
+import { RolledItemEntity } from './rolled-item.entity.js';
+import { RolloverEntity } from './rollover.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
 import { NoteAnswerEntity } from './note-answer.entity.js';
 import { NoteEntity } from './note.entity.js';
@@ -71,4 +73,6 @@ export const ENTITIES = [
   VersionVariantEntity,
   ActualDateEntity,
   ConsentEntity,
+  RolloverEntity,
+  RolledItemEntity,
 ];

@@ -17,6 +17,7 @@ import { Deaths1798410000000 } from './1798410000000-deaths.js';
 import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
 import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-without-address.js';
 import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
+import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -39,4 +40,5 @@ export const MIGRATIONS = [
   ActualDates1798500000000,
   PeopleWithoutAddress1798510000000,
   CalendarFeeds1798600000000,
+  Rollovers1798800000000,
 ];

@@ -14,9 +14,17 @@ export interface CalendarFacts {
   entryCount: number;
   /** Whoever does not see drafts learns nothing about one: not that it is out, how long it is, when it changed. */
   showsDraft: boolean;
+  /** The year that the draft was begun from, where it was. */
+  rolledFromYear: number | null;
 }
 
-export function toCalendar({ row, published, entryCount, showsDraft }: CalendarFacts): Calendar {
+export function toCalendar({
+  row,
+  published,
+  entryCount,
+  showsDraft,
+  rolledFromYear,
+}: CalendarFacts): Calendar {
   return {
     id: row.id,
     communityId: row.communityId,
@@ -29,6 +37,7 @@ export function toCalendar({ row, published, entryCount, showsDraft }: CalendarF
     published: published && { number: published.number, label: published.label },
     entryCount,
     updatedAt: (showsDraft ? row.updatedAt : (published?.publishedAt ?? row.createdAt)).toISOString(),
+    ...(showsDraft && rolledFromYear !== null && row.submissionCount === 0 ? { rolledFromYear } : {}),
   };
 }
 

@@ -1,7 +1,9 @@
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import { In, IsNull, type EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { RolloverEntity } from '../../db/entities/rollover.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import type { SeenThing } from '../../policy/entry-sight.js';
 import { markerKeyOfLead } from './sky-dates.service.js';
@@ -73,6 +75,22 @@ export async function publishedFacts(
     facts.set(calendarId, { number, label: label ?? '', publishedAt, things });
   }
   return facts;
+}
+
+/** The year of the draft that each began from; those that began empty are missing. */
+export async function rolledFromYears(
+  manager: EntityManager,
+  calendarIds: readonly string[],
+): Promise<Map<string, number>> {
+  const rows = await manager.findBy(RolloverEntity, { calendarId: In([...calendarIds]) });
+  const from = await manager.findBy(CalendarEntity, { id: In(rows.map((row) => row.fromCalendarId)) });
+  const yearOf = new Map(from.map(({ id, year }) => [id, year]));
+  return new Map(
+    rows.flatMap(({ calendarId, fromCalendarId }) => {
+      const year = yearOf.get(fromCalendarId);
+      return year === undefined ? [] : [[calendarId, year]];
+    }),
+  );
 }
 
 function grouped(pairs: readonly (readonly [string, SeenThing])[]): Map<string, SeenThing[]> {

@@ -13,7 +13,7 @@ import { entrySight, type SeenThing } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { toCalendar } from './calendars.mapper.js';
-import { draftThings, publishedFacts } from './calendars.repository.js';
+import { draftThings, publishedFacts, rolledFromYears } from './calendars.repository.js';
 
 export class CalendarsService {
   constructor(
@@ -92,6 +92,7 @@ export class CalendarsService {
     const { manager } = this.dataSource;
     const drafts = await draftThings(manager, ids);
     const published = await publishedFacts(manager, ids);
+    const rolled = await rolledFromYears(manager, ids);
     const counted = await Promise.all(
       rows.map(async (row) => {
         const actor = actors.get(row.communityId);
@@ -99,7 +100,13 @@ export class CalendarsService {
         const showsDraft = actor !== undefined && seesDrafts(actor);
         const things = showsDraft ? (drafts.get(row.id) ?? []) : (facts?.things ?? []);
         const entryCount = actor === undefined ? 0 : await this.countSeen(actor, things);
-        return toCalendar({ row, published: facts, entryCount, showsDraft });
+        return toCalendar({
+          row,
+          published: facts,
+          entryCount,
+          showsDraft,
+          rolledFromYear: rolled.get(row.id) ?? null,
+        });
       }),
     );
     return counted;

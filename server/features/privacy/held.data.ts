@@ -44,6 +44,8 @@ export const HELD: Readonly<Record<string, Held>> = {
   entry: row('knowledge', ['updated_by'], ['id', 'calendar_id', 'updated_at']),
   actual_date: row('knowledge', ['typed_by'], ['entry_id', 'first_day', 'last_day', 'typed_at']),
   entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
+  rollover: row('knowledge', ['rolled_by'], ['calendar_id', 'rolled_at']),
+  rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   item_sharing: row('knowledge', ['giver_id'], 'all'),
   version_entry: row('knowledge', [], []),

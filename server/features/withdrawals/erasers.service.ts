@@ -15,6 +15,7 @@ import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.se
 import { eraseConsents } from '../consents/consent-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
 import { eraseNote, eraseNotesOf } from '../notes/note-eraser.service.js';
+import { forgetRolledDays, sameInOtherYears } from '../rollovers/same-things.service.js';
 import {
   eraseFrozenEntry,
   eraseFrozenFigure,
@@ -56,6 +57,12 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       itemType === 'entry' || itemType === 'figure' || itemType === 'note'
         ? attached(await eraseAttachmentsOf(manager, itemType, [itemId]))
         : {},
+    // The same thing in the drafts and versions of other years goes with it.
+    async (manager, { itemType, itemId }) => {
+      const others = await sameInOtherYears(manager, itemType, itemId);
+      await forgetRolledDays(manager, itemId);
+      return { withIt: others.map((id) => ({ itemType, itemId: id })) };
+    },
     only('note', async (manager, { itemId }) => {
       await eraseNote(manager, itemId);
       return {};

@@ -11,6 +11,7 @@ import { takeNameOffSpeaker } from '../attachments/attachment-eraser.service.js'
 import { takeNameOffDraft } from '../calendars/entry-eraser.service.js';
 import { takeNamesOffConsents } from '../consents/consent-eraser.service.js';
 import { takeNamesOffTellings } from '../figures/figure-eraser.service.js';
+import { sameInOtherYears } from '../rollovers/same-things.service.js';
 import { takeNameOffVariant } from '../variants/variant-eraser.service.js';
 import {
   takeNameOffFrozen,
@@ -39,7 +40,10 @@ export async function takeNamesOff(
   giverId: string | null,
 ): Promise<void> {
   const giver = { id: giverId, names: await namesOn(manager, thing) };
-  const theirs = [thing, ...(await hangingOf(manager, thing, giver))];
+  const others = await sameInOtherYears(manager, thing.itemType, thing.itemId);
+  const everyYear = [thing, ...others.map((itemId) => ({ itemType: thing.itemType, itemId }))];
+  const theirs = [...everyYear];
+  for (const one of everyYear) theirs.push(...(await hangingOf(manager, one, giver)));
   for (const { itemType, itemId } of theirs) {
     await TAKE_OFF[itemType](manager, itemId);
     await takeNamesOffConsents(manager, itemType, itemId, giver);

@@ -7,7 +7,7 @@ import {
 } from '#shared/contracts/withdrawals.js';
 import { subDays } from 'date-fns';
 import { randomUUID } from 'node:crypto';
-import { In, IsNull, MoreThan, type DataSource, type EntityManager } from 'typeorm';
+import { In, IsNull, MoreThan, Not, type DataSource, type EntityManager } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -21,6 +21,7 @@ import { viewerOf } from '../../policy/viewer.js';
 import type { WithdrawalList } from '../../storage/withdrawal-list.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { hasSound, keepsWords } from '../attachments/attachment-eraser.service.js';
+import { sameInOtherYears } from '../rollovers/same-things.service.js';
 import type { Eraser } from './eraser.service.js';
 import { takeNamesOff } from './name-removal.service.js';
 import { couldSee, lockOwn, mayResume } from './taking-back.service.js';
@@ -183,12 +184,18 @@ export class WithdrawalsService {
     if (affected === 0) throw notFound();
   }
 
+  /** In every year's draft in which the thing stands. */
   private async setState(
     manager: EntityManager,
     { itemType, itemId }: ItemSharingEntity,
     state: 'shared' | 'paused',
   ): Promise<void> {
-    await manager.update(ItemSharingEntity, { itemType, itemId }, { state, stateAt: this.clock.now() });
+    const ids = [itemId, ...(await sameInOtherYears(manager, itemType, itemId))];
+    await manager.update(
+      ItemSharingEntity,
+      { itemType, itemId: In(ids), state: Not('withdrawn') },
+      { state, stateAt: this.clock.now() },
+    );
   }
 
   private async record(

@@ -63,6 +63,7 @@ export const texts = {
     'consent-changed': '{{actor}} wrote down a new answer about “{{subject}}”: {{state}}.',
     'consent-withdrawn': '{{actor}} took back what was agreed about “{{subject}}”.',
     'calendar-begun': '{{actor}} began the calendar {{subject}}.',
+    'calendar-rolled-over': '{{actor}} began the calendar {{subject}} from the year before.',
     'entry-added': '{{actor}} added the entry “{{subject}}”.',
     'entry-changed': '{{actor}} changed the entry “{{subject}}”: {{fields}}.',
     'entry-copied': '{{actor}} made a copy: “{{subject}}”.',

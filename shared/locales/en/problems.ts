@@ -37,6 +37,7 @@ export const texts = {
     'already-active': 'This person has a password already and needs no code.',
     'named-in-rule': 'The sign-off rule names this person. Change the rule first.',
     'calendar-exists': 'This place already has a calendar for that year. Open that one.',
+    'no-year-after': 'Calendars are made up to this year; there is none after it.',
     'no-entries': 'The draft has no entries yet. Add one before you submit it.',
     'contacts-missing':
       'Weather and agriculture contacts are missing. The steward fills them in under Village, Settings.',

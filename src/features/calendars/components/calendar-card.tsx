@@ -1,4 +1,5 @@
 import { ChevronRight, Plus, Printer } from 'lucide-react';
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { Calendar } from '#shared/contracts/calendars.js';
@@ -15,10 +16,12 @@ interface CalendarCardProps {
   isElder: boolean;
   seesDrafts: boolean;
   wanted: WantedMarker | null;
+  /** The way to the next year. */
+  next: ReactNode;
 }
 
 /** One calendar: what is published, what is out, and the ways on. */
-export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted }: CalendarCardProps) {
+export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted, next }: CalendarCardProps) {
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
   const { id, year, placeName, published, outNumber, entryCount, updatedAt } = calendar;
@@ -76,6 +79,7 @@ export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted 
             {t('list.print')}
           </Link>
         )}
+        {next}
       </div>
     </Board>
   );

@@ -1,6 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
+import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
+import type { Calendar } from '#shared/contracts/calendars.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
@@ -14,8 +16,13 @@ import { BeginCalendar } from './begin-calendar.js';
 import { CalendarCard } from './calendar-card.js';
 import { ChooseForMarker } from './choose-for-marker.js';
 
+interface CalendarsPageProps {
+  /** The way from one year to the next, on each calendar's card. */
+  next: (card: { calendar: Calendar; calendars: readonly Calendar[]; isOfficer: boolean }) => ReactNode;
+}
+
 /** The calendars of the village, and the way to begin one. */
-export function CalendarsPage() {
+export function CalendarsPage({ next }: CalendarsPageProps) {
   const { t } = useTranslation('calendars');
   const { communityId, communityName } = useCurrentCommunity();
   const { isOfficer, isElder, seesDrafts } = useRolesIn(communityId);
@@ -59,6 +66,7 @@ export function CalendarsPage() {
               isElder={isElder}
               seesDrafts={seesDrafts}
               wanted={wanted}
+              next={wanted === null ? next({ calendar, calendars: list, isOfficer }) : null}
             />
           ))}
         </div>

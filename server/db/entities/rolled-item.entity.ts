@@ -1,0 +1,28 @@
+import type { EntryDates } from '#shared/contracts/calendars.js';
+import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
+import { codeColumn } from './columns.js';
+
+/**
+ * The same thing in two years' drafts. The row outlives both: what is taken back in one year goes from every year,
+ * also when older tables are put back.
+ */
+@Entity({ name: 'rolled_item' })
+export class RolledItemEntity {
+  @PrimaryColumn({ name: 'item_id', type: 'uuid' })
+  itemId!: string;
+
+  @Column({ name: 'item_type', ...codeColumn(16) })
+  itemType!: 'entry' | 'variant';
+
+  @Index('rolled_item_from')
+  @Column({ name: 'from_id', type: 'uuid' })
+  fromId!: string;
+
+  @Index('rolled_item_calendar')
+  @Column({ name: 'calendar_id', type: 'uuid' })
+  calendarId!: string;
+
+  /** An entry's days in the year before; no words. Null for a variant, and once the thing was taken back. */
+  @Column({ type: 'json', nullable: true })
+  before!: EntryDates | null;
+}

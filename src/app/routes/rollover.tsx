@@ -1,0 +1,1 @@
+export { RolloverPage as Component } from '#src/features/rollovers/components/rollover-page.js';
