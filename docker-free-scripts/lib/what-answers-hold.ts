@@ -127,7 +127,6 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   listVariants: { variant: keptSeen, 'kept variant': keptSeen },
   // The officer who rolled over neither sees nor counts what is kept.
   readRollover: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
-  listVariants: { variant: keptSeen },
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
   listAnswers: { answer: keptSeen },

@@ -150,6 +150,27 @@ describe('what goes along into the next year', () => {
     expect((await entriesOf(village.elder, next)).map(({ mine }) => mine)).toContain(true);
   });
 
+  it('is the work that other work is counted from, in its own next year; what was seen or done stays behind', async () => {
+    const { officer } = village;
+    const hung = await addEntry(officer, calendar.id, {
+      titleOfficer: 'Weed',
+      lead: { type: 'entry-planned', entryId: entry.id, day: 'bestTo' },
+    });
+    await addEntry(officer, calendar.id, {
+      titleOfficer: 'Mend',
+      lead: {
+        ...{ type: 'marker-as-seen', markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 },
+        seen: { date: '2027-06-20', by: 'Marrun', agreedBy: 'A-1' },
+      },
+    });
+    const next = await rolledOver();
+    const [sow, weed, mend] = await entriesOf(officer, next);
+    expect(weed?.content.lead).toMatchObject({ type: 'entry-planned', entryId: sow?.id });
+    expect(weed?.dates.window?.bestFrom).toMatch(/^2028-/u);
+    expect(hung.dates.window?.bestFrom).toMatch(/^2027-/u);
+    expect(mend?.content.lead).toMatchObject({ type: 'marker-as-seen', seen: null });
+  });
+
   it('is a no: what was only agreed to be kept is hidden in the next year, too', async () => {
     await addConsent(village.elder, 'entry', entry.id, { uses: ['keep'], giverId: village.elder.personId });
     const next = await rolledOver();
