@@ -19,7 +19,7 @@ export function RolledTable({ group, entries, report }: RolledTableProps) {
   const moveWords = useMoveWords();
   const { calendarId, fromYear: from, year } = report;
   return (
-    <Table caption={t('table.caption', { group: t(`group.${group}`, { year }), from, year })}>
+    <Table middle caption={t('table.caption', { group: t(`group.${group}`, { year }), from, year })}>
       <thead>
         <tr>
           <th scope="col">{t('table.entry')}</th>

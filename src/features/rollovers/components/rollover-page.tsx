@@ -56,7 +56,7 @@ function Report({ report }: { report: RolloverReport }) {
         under={t('under', { place, name, when: dates.moment(rolledAt) })}
         backTo={paths.calendars()}
       />
-      <div className="grid gap-4">
+      <div className="grid grid-cols-1 gap-4">
         <Board title={t('counts.title')}>
           <ul className="grid gap-1">
             {groups.map(({ group, entries }) => (
