@@ -180,11 +180,16 @@ describe('a withdrawn entry', () => {
   async function placesWith(word: string): Promise<string[]> {
     const rolled = await village.officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
     const found = [...(await tablesWith(api, word)), ...filesWith(api, word)];
+    const rolledId = (rolled.body as { calendarId: string }).calendarId;
     const askable = {
+      only: {
+        readRollover: { calendarId: [rolledId] },
+        listEntries: { calendarId: [calendarId, rolledId] },
+      },
       params: {
         communityId: [village.officer.communityId],
         placeId: [village.placeId],
-        calendarId: [calendarId, (rolled.body as { calendarId: string }).calendarId],
+        calendarId: [calendarId],
         entryId: [entry.id],
         number: ['1', 'draft'],
         figureId: [entry.id],
