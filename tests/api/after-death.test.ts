@@ -53,8 +53,11 @@ describe('what was chosen for after a death', () => {
     const kept = await given({ afterDeath: 'keep' });
     const told = await given({ afterDeath: 'tighten' });
     const passed = await given({ afterDeath: 'pass-to', passTo: 'Elder A-2' });
-    const { body } = await village.steward.get(path()).expect(200);
-    expect(body).toMatchObject({ diedOn: null, chosen: { keep: 1, tighten: 1, passTo: 1, remove: 0 } });
+    const chosen = await village.steward.get(path()).expect(200);
+    expect(chosen.body).toMatchObject({
+      diedOn: null,
+      chosen: { keep: 1, tighten: 1, passTo: 1, remove: 0 },
+    });
     expect((await note().expect(200)).body).toMatchObject({ diedOn: '2026-11-30', mayUndo: true });
     expect(await sharingOf(kept)).toMatchObject({ sharing: { level: 'village' } });
     expect(await sharingOf(told)).toMatchObject({

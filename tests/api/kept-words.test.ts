@@ -114,8 +114,8 @@ describe('a correction', () => {
     await village.officer.put(path, { ...words, text: 'Ten nights', version: null }).expect(200);
     const right = { ...words, text: 'Two nights', checkedBySpeaker: true, version: 1 };
     expect(reasonOf(await staff.put(path, right))).toBe('409 not-yours');
-    const { body } = await observer.put(path, right).expect(200);
-    expect(body).toMatchObject({ words: [{ text: 'Two nights', checkedBySpeaker: true }] });
+    const corrected = await observer.put(path, right).expect(200);
+    expect(corrected.body).toMatchObject({ words: [{ text: 'Two nights', checkedBySpeaker: true }] });
   });
 
   it('of an entry is asked for by its giver as a note, in a draft that they see nothing else of', async () => {

@@ -126,12 +126,12 @@ describe('what was marked at a meeting', () => {
 describe('the sheet that is read to a meeting', () => {
   it('holds each entry in sentences, the four answers, every elder, and number and hash on every page', async () => {
     const path = `${versionPath(version)}/read-back.pdf`;
-    const { body } = await village.officer
+    const sheet = await village.officer
       .get(path)
       .responseType('blob')
       .expect(200)
       .expect('Content-Type', 'application/pdf');
-    const pages = readPdfText(body as Buffer)
+    const pages = readPdfText(sheet.body as Buffer)
       .split('\f')
       .map((page) => page.replace(/\s+/gu, ' '))
       .filter((page) => page.trim() !== '');

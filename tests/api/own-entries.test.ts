@@ -64,8 +64,9 @@ describe('whoever keeps an entry', () => {
 
   it('reads that entry with its marker, its place and its year, and nothing else of the submission', async () => {
     await answer(village.steward, { answer: 'change-this', note: 'Later in the evening' }).expect(200);
-    const { body, text } = await observer.get(`${versionPath(version)}/own-entries`).expect(200);
-    const own = body as OwnEntries;
+    const answered = await observer.get(`${versionPath(version)}/own-entries`).expect(200);
+    const { text } = answered;
+    const own = answered.body as OwnEntries;
     expect(own).toMatchObject({ year: 2027, placeName: 'Upper terraces' });
     expect(own.items.map(({ entry, answer: given }) => [entry.content.titleOfficer, given])).toEqual([
       ['Lamp evening', null],
@@ -197,8 +198,8 @@ async function ownAnswer(client: Client) {
 }
 
 async function waitsFor(client: Client): Promise<[number, number] | null> {
-  const { body } = await client.get(`/api/communities/${client.communityId}/today`).expect(200);
-  const found = (body as Today).waiting.find(({ kind }) => kind === 'answer-own-entries');
+  const today = await client.get(`/api/communities/${client.communityId}/today`).expect(200);
+  const found = (today.body as Today).waiting.find(({ kind }) => kind === 'answer-own-entries');
   return found === undefined ? null : [found.done, found.of];
 }
 

@@ -78,8 +78,9 @@ function toRead(entry: VersionEntryBody, header: VersionHeader): ReadBackModel['
   } else {
     sentences.push(t('readBack.best', { range: words.range(window.bestFrom, window.bestTo) }));
   }
-  if (marker?.expected != null) {
-    const { expected, early, late } = marker;
+  const expected = marker?.expected ?? null;
+  if (marker && expected !== null) {
+    const { early, late } = marker;
     const name = `${marker.titles.officer} (${marker.phenomenon})`;
     sentences.push(
       early === null || late === null

@@ -153,7 +153,7 @@ export const texts = {
     'not-an-email': 'Write a whole e-mail address, such as name@example.org.',
     'address-needed': 'Officers, stewards and staff sign in with a password, and need an address for it.',
     'address-taken': 'Somebody has this address already.',
-    'password-too-short': 'Use at least 10 characters. A short sentence is easy to remember.',
+    'password-too-short': 'Use at least 12 characters. A short sentence is easy to remember.',
     'card-code-length': 'A card has eighteen letters and numbers. Look at it once more.',
     'pin-digits': 'A PIN has four to six numbers.',
     'pin-too-easy': 'This one is easy to guess. Choose other numbers.',

@@ -7,10 +7,11 @@ import type { VersionRef } from './reviews-api.js';
 const paramsOf = ({ calendarId, number }: VersionRef) => ({ calendarId, number: String(number) });
 
 /** What of a submission the person keeps with others, and nothing else of it. */
-export function ownEntriesQuery(ref: VersionRef) {
+export function ownEntriesQuery({ calendarId, number }: VersionRef) {
   return queryOptions({
-    queryKey: [...calendarKeys.version(ref.calendarId, ref.number), 'own'],
-    queryFn: ({ signal }) => callApi(reviewsEndpoints.readOwn, { params: paramsOf(ref), signal }),
+    queryKey: [...calendarKeys.version(calendarId, number), 'own'],
+    queryFn: ({ signal }) =>
+      callApi(reviewsEndpoints.readOwn, { params: paramsOf({ calendarId, number }), signal }),
   });
 }
 

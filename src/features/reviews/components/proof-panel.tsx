@@ -1,5 +1,5 @@
 import { Mic, Square } from 'lucide-react';
-import { useEffect, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { PIN_MAX } from '#shared/contracts/cards.js';
 import type { AnswerWord } from '#shared/contracts/reviews.js';
@@ -109,15 +109,12 @@ export function ProofPanel({
 }
 
 function useSource(content: Blob | null): string | null {
-  const [source, setSource] = useState<string | null>(null);
-  useEffect(() => {
-    if (content === null) return undefined;
-    const url = URL.createObjectURL(content);
-    setSource(url);
-    return () => {
-      URL.revokeObjectURL(url);
-      setSource(null);
-    };
-  }, [content]);
+  const source = useMemo(() => (content === null ? null : URL.createObjectURL(content)), [content]);
+  useEffect(
+    () => () => {
+      if (source !== null) URL.revokeObjectURL(source);
+    },
+    [source],
+  );
   return source;
 }
