@@ -5,6 +5,7 @@ import { feedLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import type { ExportsService } from './exports.service.js';
+import { feedFile } from './feed-file.js';
 import type { FeedsService } from './feeds.service.js';
 
 export function exportsRoutes(
@@ -31,6 +32,6 @@ export function exportsRoutes(
   });
   mount.forAnybody(
     exportsEndpoints.readFeed,
-    async ({ query }) => new StoredFileReply(await feeds.fetch(query.key)),
+    async ({ query }) => new StoredFileReply(feedFile(await feeds.fetch(query.key))),
   );
 }

@@ -1,6 +1,5 @@
 import { FEEDS_MAX, type Feed, type MadeFeed } from '#shared/contracts/exports.js';
 import { createHash, randomBytes, randomUUID } from 'node:crypto';
-import { Readable } from 'node:stream';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarFeedEntity } from '../../db/entities/calendar-feed.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
@@ -9,7 +8,6 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import type { StoredFile } from '../../http/file-reply.js';
 import { villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
@@ -60,7 +58,7 @@ export class FeedsService {
   }
 
   /** Whoever has the key fetches what its person would be handed today; without a membership there is nothing. */
-  async fetch(key: string): Promise<StoredFile> {
+  async fetch(key: string): Promise<string> {
     const { manager } = this.dataSource;
     const feed = await manager.findOne(CalendarFeedEntity, {
       where: { keyHash: hashOf(key) },
@@ -80,7 +78,7 @@ export class FeedsService {
     const fetchedOn = await villageDay(manager, communityId, this.clock.now());
     if (feed.fetchedOn !== fetchedOn)
       await manager.update(CalendarFeedEntity, { id: feed.id }, { fetchedOn });
-    return fileOf(text);
+    return text;
   }
 
   /** What stands published now, of every calendar of the village, in the order of their years. */
@@ -112,18 +110,6 @@ export class FeedsService {
 
 function toFeed({ id, madeAt, fetchedOn }: Pick<CalendarFeedEntity, 'id' | 'madeAt' | 'fetchedOn'>): Feed {
   return { id, madeAt: madeAt.toISOString(), fetchedOn };
-}
-
-function fileOf(text: string): StoredFile {
-  const content = Buffer.from(text, 'utf8');
-  return {
-    bytes: content.length,
-    contentType: 'text/calendar; charset=utf-8',
-    fileName: 'calendar.ics',
-    tag: createHash('sha256').update(content).digest('hex'),
-    open: (range) =>
-      Promise.resolve(Readable.from([range ? content.subarray(range.start, range.end + 1) : content])),
-  };
 }
 
 function hashOf(key: string): string {
