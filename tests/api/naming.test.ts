@@ -95,7 +95,8 @@ async function readsAt(client: Client, word: string, { entry, variant, recording
       readSheet: ['?layout=year-board'],
     },
   };
-  for (const endpoint of READING) {
+  // What the sky says of a place names no giver.
+  for (const endpoint of READING.filter(({ path }) => !path.startsWith('/api/places/'))) {
     for (const path of pathsOf(endpoint, askable)) {
       if ((await textOf(client, path, endpoint)).includes(word)) found.push(path);
     }
