@@ -6,7 +6,7 @@ import { reachOf, serverEnvironment } from './kept-database.mjs';
 import { makeBackup } from './make-backup.mjs';
 import { Remedy, say } from './say.mjs';
 import { sourceTool } from './source-tool.mjs';
-import { copyIn, tablesOf } from './sql-copy.mjs';
+import { copyIn, createEmpty, tablesOf } from './sql-copy.mjs';
 
 /** @typedef {import('./settings.mjs').Settings} Settings */
 
@@ -46,11 +46,6 @@ export async function restoreBackup(settings, dbPort, { from, replace, withdrawa
   if (done.code === 0)
     say(`The villages are as they were on ${manifest.madeAt}, without what was taken back since.`);
   return done.code;
-}
-
-/** @param {import('mysql2/promise').Connection} asker @param {string} name */
-async function createEmpty(asker, name) {
-  await asker.query('CREATE DATABASE ?? CHARACTER SET utf8mb4 COLLATE utf8mb4_uca1400_as_ci', [name]);
 }
 
 /** @param {import('mysql2/promise').Connection} asker @param {string} incoming @param {string} name */

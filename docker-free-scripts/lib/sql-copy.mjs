@@ -73,6 +73,11 @@ export async function copyIn(reach, file) {
   }
 }
 
+/** A database without a table. @param {import('mysql2/promise').Connection} asker @param {string} name */
+export async function createEmpty(asker, name) {
+  await asker.query('CREATE DATABASE ?? CHARACTER SET utf8mb4 COLLATE utf8mb4_uca1400_as_ci', [name]);
+}
+
 /** @param {import('mysql2/promise').Connection} asker @param {string} database @returns {Promise<string[]>} */
 export async function tablesOf(asker, database) {
   const [rows] = await asker.query(

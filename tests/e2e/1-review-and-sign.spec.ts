@@ -33,7 +33,7 @@ test('an elder meets one entry at a time, sees the kept difference, answers and 
   const answers = page.getByRole('group', { name: 'Your answer' });
   await answers.getByRole('button', { name: 'Change this' }).click();
   await page.getByRole('button', { name: 'Keep this answer' }).click();
-  await expect(page.getByText('Write what should be different.')).toBeVisible();
+  await expect(page.getByText('Say what should be different: write it, or speak it.')).toBeVisible();
   await page.getByLabel('What should be different?').fill('Begin three days later.');
   await page.reload();
   await answers.getByRole('button', { name: 'Change this' }).click();

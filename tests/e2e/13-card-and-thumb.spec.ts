@@ -89,6 +89,7 @@ test('a card and a PIN open the review on a small phone; four buttons finish it;
   page,
   browser,
 }) => {
+  test.setTimeout(180_000);
   await signIn(page, 'steward');
   const code = await makeCard(page, 'Elder A-2');
 

@@ -1,11 +1,9 @@
 import { mkdtempSync, rmSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
-import { freePort } from '../../docker-free-scripts/lib/ports.mjs';
 import { startBuiltServer } from '../../docker-free-scripts/lib/product-server.mjs';
-import { randomText } from '../../docker-free-scripts/lib/secrets.mjs';
-import { JOURNEY_NOW } from './journey-clock.js';
 import { freshJourneyDatabase } from './journey-database.js';
+import { journeyEnvironment } from './journey-environment.js';
 
 interface Running {
   readonly story: string;
@@ -47,17 +45,7 @@ export class JourneyProduct {
       const server = await startBuiltServer({
         ...process.env,
         ...(await freshJourneyDatabase(`dawnpeg_journey_${this.workerIndex}_${this.stories}`)),
-        NODE_ENV: 'development',
-        HOST: '127.0.0.1',
-        PORT: String(await freePort()),
-        PUBLIC_URL: '',
-        DATA_DIR: dataDir,
-        SESSION_SECRET: randomText(),
-        DEMO: '1',
-        FIXED_NOW: JOURNEY_NOW,
-        LETTER_ROUND_SECONDS: '1',
-        LOG_LEVEL: 'error',
-        TRUST_PROXY: '0',
+        ...(await journeyEnvironment(dataDir)),
       });
       return {
         story,
