@@ -43,7 +43,7 @@ const isOnSheet = async (page: Page, { path, title }: { path: string; title: str
 test('an officer asks use by use, and the sheet goes by the tick for print', async ({ page }) => {
   await signIn(page, 'officer');
   const entry = await published(page);
-  expect(await isOnSheet(page, entry)).toBe(true);
+  await expect.poll(() => isOnSheet(page, entry)).toBe(true);
   await page.goto(`/village/consents/entry/${entry.entryId}`);
   await expect(page.getByText('Nobody has been asked about this yet')).toBeVisible();
   await page
@@ -75,7 +75,7 @@ test('an officer asks use by use, and the sheet goes by the tick for print', asy
   await expect(page.getByRole('heading', { name: 'Old Marrun' })).toBeVisible();
   await expectNoSidewaysScroll(page);
   await expectAccessible(page);
-  expect(await isOnSheet(page, entry)).toBe(false);
+  await expect.poll(() => isOnSheet(page, entry)).toBe(false);
 
   await page.getByRole('button', { name: 'Write down a new answer' }).click();
   await page.getByRole('radio', { name: 'Yes', exact: true }).press(' ');
@@ -87,7 +87,7 @@ test('an officer asks use by use, and the sheet goes by the tick for print', asy
   await page.getByLabel('Who was there').fill('Tirel');
   await page.getByRole('button', { name: 'Write it down' }).click();
   await expect(page.getByText('Written down.')).toBeVisible();
-  expect(await isOnSheet(page, entry)).toBe(true);
+  await expect.poll(() => isOnSheet(page, entry)).toBe(true);
   const card = await page.request.get(
     (await page.getByRole('link', { name: 'Card to print' }).getAttribute('href')) ?? '',
   );
@@ -107,7 +107,7 @@ test('the steward finds it in the register and takes it back for the giver', asy
   await expect(page.getByText('This thing is hidden')).toBeVisible();
   const { entries } = await json<Version>(page, entry.path);
   expect(entries.map(({ entryId }) => entryId)).not.toContain(entry.entryId);
-  expect(await isOnSheet(page, entry)).toBe(false);
+  await expect.poll(() => isOnSheet(page, entry)).toBe(false);
 });
 
 test('a yes that is due again waits on Today, for whoever asks for it', async ({ page }) => {
