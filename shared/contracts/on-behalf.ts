@@ -26,6 +26,9 @@ export const ON_BEHALF: Readonly<Record<string, OnBehalfRule>> = {
   resumeItem: 'pin-shown',
   takeNameOff: 'pin-shown',
   withdrawConsent: 'pin-shown',
+  // The clip that comes with it is the proof.
+  addSpokenConsent: 'pin-shown',
+  changeSpokenConsent: 'pin-shown',
   addConsent: 'pin-again',
   changeConsent: 'pin-again',
 };

@@ -11,7 +11,7 @@ import type { Version } from '#shared/contracts/versions.js';
 import { openTestApi, TEST_NOW, type Client, type TestApi } from '#tests/support/api.js';
 import { addRecording } from '#tests/support/attachment-api.js';
 import { openSubmission, reasonOf, says, versionPath, type Village } from '#tests/support/calendar-api.js';
-import { asked } from '#tests/support/consent-api.js';
+import { asked, consentsPath, spokenContent } from '#tests/support/consent-api.js';
 import { webm } from '#tests/support/media.js';
 import { noteInput } from '#tests/support/notes-api.js';
 import { givePin, PIN, WRONG_PIN } from '#tests/support/pin-cards.js';
@@ -170,6 +170,21 @@ describe('what is written while helping', () => {
     expect((await records())[0]).toMatchObject({
       action: 'consent-written',
       actorName: observer.session.person?.displayName,
+      onBehalfOfName: 'Elder A-1',
+    });
+  });
+
+  it('is a consent by the elder’s voice as well, recorded with it', async () => {
+    await help(observer).expect(200);
+    const itemId = version.entries[0]?.entryId ?? '';
+    const said = spokenContent({ answer: 'given', uses: ['keep', 'show'], giverId: village.elder.personId });
+    const sent = await observer.upload(
+      consentsPath(observer, '', '/spoken'),
+      { ...said, itemType: 'entry', itemId },
+      webm({ note: 'I agree' }),
+    );
+    expect([sent.status, sent.body]).toMatchObject([201, { content: { proof: { kind: 'voice' } } }]);
+    expect((await records()).find(({ action }) => action === 'consent-written')).toMatchObject({
       onBehalfOfName: 'Elder A-1',
     });
   });
