@@ -1,4 +1,5 @@
-import { ROLLED_OUTCOMES, type RolledEntry } from '#shared/contracts/rollovers.js';
+import type { ROLLED_OUTCOMES} from '#shared/contracts/rollovers.js';
+import { type RolledEntry } from '#shared/contracts/rollovers.js';
 
 export type RolledGroup = (typeof ROLLED_OUTCOMES)[number] | 'consent';
 
