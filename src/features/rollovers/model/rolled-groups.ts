@@ -1,4 +1,4 @@
-import type { ROLLED_OUTCOMES} from '#shared/contracts/rollovers.js';
+import type { ROLLED_OUTCOMES } from '#shared/contracts/rollovers.js';
 import { type RolledEntry } from '#shared/contracts/rollovers.js';
 
 export type RolledGroup = (typeof ROLLED_OUTCOMES)[number] | 'consent';
