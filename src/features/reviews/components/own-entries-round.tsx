@@ -1,4 +1,4 @@
-import { ArrowLeft, ArrowRight } from 'lucide-react';
+import { ArrowLeft } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
@@ -10,6 +10,7 @@ import { Page } from '#src/ui/page.js';
 import type { VersionRef } from '../api/reviews-api.js';
 import { nextOpen } from '../model/answers-of.js';
 import { useFocusOnMove } from '../model/use-focus-on-move.js';
+import { EntrySteps } from './entry-steps.js';
 import { EntryView } from './entry-view.js';
 import { OwnAnswerFoot } from './own-answer-foot.js';
 
@@ -64,29 +65,7 @@ export function OwnEntriesRound({
           <div className="review-entry">
             <p className="text-umber-soft">{t('own.keptHint')}</p>
             <p className="text-umber-soft">{t('silence')}</p>
-            {items.length > 1 && (
-              <div className="flex flex-wrap justify-between gap-2">
-                <Button
-                  look="quiet"
-                  icon={<ArrowLeft aria-hidden size={20} className="turns" />}
-                  closedBecause={index === 0 ? t('entryOf', { entry: 1, total: items.length }) : undefined}
-                  onClick={() => {
-                    setIndex(index - 1);
-                  }}
-                >
-                  {t('before')}
-                </Button>
-                <Button
-                  look="quiet"
-                  icon={<ArrowRight aria-hidden size={20} className="turns" />}
-                  onClick={() => {
-                    setIndex(index + 1);
-                  }}
-                >
-                  {index + 1 < items.length ? t('next') : t('toEnd')}
-                </Button>
-              </div>
-            )}
+            {items.length > 1 && <EntrySteps index={index} total={items.length} goTo={setIndex} />}
           </div>
           <OwnAnswerFoot
             key={current.entry.entryId}

@@ -1,4 +1,4 @@
-import { ArrowLeft, ArrowRight } from 'lucide-react';
+import { ArrowLeft } from 'lucide-react';
 import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
@@ -7,12 +7,12 @@ import type { Version, VersionEntry } from '#shared/contracts/versions.js';
 import { useRoles } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
 import { useActing, useSession } from '#src/lib/session.js';
-import { Button } from '#src/ui/button.js';
 import { ProgressPegs } from '#src/ui/pegs.js';
 import { Page } from '#src/ui/page.js';
 import { answersOf, nextOpen } from '../model/answers-of.js';
 import { useFocusOnMove } from '../model/use-focus-on-move.js';
 import { AnswerFoot } from './answer-foot.js';
+import { EntrySteps } from './entry-steps.js';
 import { EntryView } from './entry-view.js';
 import { ForWhom, type Spokesman, type SpokesmanProblem } from './for-whom.js';
 import type { Speak } from './note-panel.js';
@@ -112,27 +112,7 @@ export function ReviewRound({
             />
             {about(entry)}
             <p className="text-umber-soft">{t('silence')}</p>
-            <div className="flex flex-wrap justify-between gap-2">
-              <Button
-                look="quiet"
-                icon={<ArrowLeft aria-hidden size={20} className="turns" />}
-                closedBecause={index === 0 ? t('entryOf', { entry: 1, total: entries.length }) : undefined}
-                onClick={() => {
-                  goTo(index - 1);
-                }}
-              >
-                {t('before')}
-              </Button>
-              <Button
-                look="quiet"
-                icon={<ArrowRight aria-hidden size={20} className="turns" />}
-                onClick={() => {
-                  goTo(index + 1);
-                }}
-              >
-                {index + 1 < entries.length ? t('next') : t('toEnd')}
-              </Button>
-            </div>
+            <EntrySteps index={index} total={entries.length} goTo={goTo} />
           </div>
           <AnswerFoot
             key={`${entry.entryId} ${elderId}`}
