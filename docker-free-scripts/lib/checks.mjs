@@ -34,13 +34,12 @@ const checks = [
   },
 ];
 
+/** The compiler's native edition: same language, a tenth of the time. The build itself is still by `tsc`. */
 async function allTypes() {
   let output = '';
   let code = 0;
   for (const folder of typedFolders) {
-    // The notes of the last run make the next one quick; they change nothing in what is found.
-    const notes = `.tmp/types-${folder}.tsbuildinfo`;
-    const done = await tool('tsc', ['-p', folder, '--noEmit', '--incremental', '--tsBuildInfoFile', notes]);
+    const done = await tool('tsgo', ['-p', folder, '--noEmit']);
     output += done.output;
     code ||= done.code;
   }

@@ -26,7 +26,7 @@ const setpriv = ['/usr/bin/setpriv', '/bin/setpriv'].find((file) => existsSync(f
  * @param {object} [options]
  * @param {string} [options.cwd]
  * @param {NodeJS.ProcessEnv} [options.env]
- * @param {string} [options.user] run as this user (only as root)
+ * @param {string | undefined} [options.user] run as this user (only as root)
  * @param {import('node:child_process').StdioOptions} [options.stdio]
  * @param {boolean} [options.outlives] true for `db.mjs start`, whose server goes on until `stop`
  * @returns {Running}
@@ -59,7 +59,7 @@ export function start(command, args, options = {}) {
  * @param {object} [options]
  * @param {string} [options.cwd]
  * @param {NodeJS.ProcessEnv} [options.env]
- * @param {string} [options.user]
+ * @param {string | undefined} [options.user]
  * @param {boolean} [options.show] true shows the output while it comes instead of keeping it
  * @param {boolean} [options.undisturbed] true lets it finish when this script is asked to end: half an
  *   installation of Debian's packages helps nobody

@@ -43,9 +43,12 @@ async function healthy(address, exited, orGoOn) {
   let ended;
   void exited.then((how) => (ended = how));
   const giveUpAt = Date.now() + READY_WITHIN_MS;
-  while ((await statusOf(`${address}/api/health`)) !== 200) {
+  for (;;) {
+    const answered = (await statusOf(`${address}/api/health`)) === 200;
     orGoOn();
+    // Before the answer is believed: it may come from another server on the same port.
     if (ended) throw new Remedy('The server ended while starting; its reason is above.');
+    if (answered) return;
     if (Date.now() > giveUpAt) throw new Remedy('The server did not become healthy within two minutes.');
     await wait(50);
   }
