@@ -113,7 +113,7 @@ function anchorDaysOf(lead: EntryLead, window: EntryWindow | null, actual: Actua
 }
 
 /** A lead as it goes into another year's draft: on the entries of that draft, and nothing seen yet. */
-export function leadForAnotherYear(lead: EntryLead, newIdOf: ReadonlyMap<string, string>): EntryLead {
+export function leadForAnotherYear<L extends EntryLead>(lead: L, newIdOf: ReadonlyMap<string, string>): L {
   if (lead.type === 'marker-as-seen') return { ...lead, seen: null };
   if (lead.type !== 'entry-planned' && lead.type !== 'entry-actual') return lead;
   return { ...lead, entryId: newIdOf.get(lead.entryId) ?? lead.entryId };

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { entryDates, entryKind } from './calendars.js';
 import { id, instant } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
+import { whyMoved } from './moves.js';
 
 export const ROLLED_OUTCOMES = ['moved', 'stays', 'lost-days', 'found-days', 'without-days'] as const;
 
@@ -20,6 +21,8 @@ export const rolledEntry = z.strictObject({
   movedDays: z.number().int().nullable(),
   /** Somebody is to be asked again, or for the first time, before this is shown or printed in the new year. */
   needsConsent: z.boolean(),
+  /** Why its days are others than the year before; left out where they are the same. */
+  why: whyMoved.optional(),
 });
 export type RolledEntry = z.infer<typeof rolledEntry>;
 

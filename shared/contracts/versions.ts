@@ -3,6 +3,7 @@ import { id, instant, line, listOf } from './common.js';
 import { entryDates, entryInput } from './calendars.js';
 import { frozenVariant } from './variants.js';
 import { defineEndpoint, member } from './endpoint.js';
+import { whyMoved } from './moves.js';
 import { language, ROLES, signOffRule } from './people.js';
 import { markerNames, nightSegment, placeSnapshot } from './stars.js';
 
@@ -168,6 +169,8 @@ export const entryComparison = z.strictObject({
   before: versionEntryBody.nullable(),
   after: versionEntryBody.nullable(),
   fields: z.array(fieldChange),
+  /** Why its days moved; left out where they did not. */
+  why: whyMoved.optional(),
 });
 export type EntryComparison = z.infer<typeof entryComparison>;
 

@@ -12,6 +12,7 @@ import { texts as figures } from './en/figures.js';
 import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
 import { texts as helping } from './en/helping.js';
+import { texts as moves } from './en/moves.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
 import { texts as look } from './en/look.js';
@@ -54,6 +55,7 @@ export const en = {
   drift,
   exports,
   moons,
+  moves,
   air,
   figures,
   calendars,

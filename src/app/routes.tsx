@@ -103,12 +103,12 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.compare,
-    texts: ['versions', 'calendars', 'sky'],
+    texts: ['versions', 'calendars', 'sky', 'moves'],
     load: () => import('./routes/compare.js'),
   },
   {
     path: PATTERNS.rollover,
-    texts: ['rollovers', 'calendars', 'sky'],
+    texts: ['rollovers', 'calendars', 'sky', 'moves'],
     load: () => import('./routes/rollover.js'),
   },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },

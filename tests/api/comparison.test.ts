@@ -67,6 +67,11 @@ describe('comparing', () => {
       'removed Seed check',
     ]);
     expect(result.entries[0]?.fields.map(({ field }) => field)).toEqual(['offsets', 'dates.window']);
+    expect(result.entries[0]?.why).toEqual({
+      moved: { point: 'earliest', days: 2 },
+      causes: [{ cause: 'offsets', days: 2 }],
+      togetherDays: 0,
+    });
     expect(result.entries[0]?.fields[0]).toMatchObject({
       before: { bestFromDays: 7 },
       after: { bestFromDays: 9 },
@@ -84,6 +89,12 @@ describe('comparing', () => {
     const moved = await compare(officer, '1', 'draft');
     expect(moved.header).toEqual([{ field: 'place.sameSideShiftDeg', before: 0, after: 2 }]);
     expect(moved.counts).toMatchObject({ changed: 2 });
+    expect(moved.entries[0]?.why?.causes).toMatchObject([{ cause: 'threshold' }]);
+    await edit(0, { offsets: { earliestDays: 5, bestFromDays: 9, bestToDays: 25, lastAdvisedDays: 30 } });
+    const both = (await compare(officer, '1', 'draft')).entries[0]?.why;
+    expect(both?.causes).toContainEqual({ cause: 'offsets', days: 2 });
+    const sum = (both?.causes ?? []).reduce((total, { days }) => total + (days ?? 0), 0);
+    expect(sum + (both?.togetherDays ?? 0)).toBe(both?.moved?.days);
     expect((await compare(officer, 'draft', '1')).header).toEqual([
       { field: 'place.sameSideShiftDeg', before: 2, after: 0 },
     ]);

@@ -6,6 +6,7 @@ import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
   beginCalendar,
+  changePlace,
   entriesOf,
   openVillage,
   outcomes,
@@ -61,6 +62,29 @@ describe('rolling over to the next year', () => {
     const { entries } = await reportOf(village.officer, await rolledOver());
     expect(entries.map(({ outcome }) => outcome)).toEqual(['stays', 'moved']);
     expect(Math.abs(entries[1]?.movedDays ?? 0)).toBeGreaterThan(3);
+    expect(entries[1]?.why?.causes).toEqual([{ cause: 'year', days: entries[1]?.movedDays }]);
+  });
+
+  it('tells the year from what people changed since: air, days from the lead, and a day that was seen', async () => {
+    const star = { markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 } as const;
+    const seen = { date: '2027-06-29', by: 'Marrun', agreedBy: 'A-1' };
+    await addEntry(village.officer, calendar.id, { lead: { type: 'marker-as-seen', ...star, seen } });
+    const next = await rolledOver();
+    const [sow] = await entriesOf(village.officer, next);
+    if (!sow) throw new Error('no entry');
+    const offsets = { earliestDays: 8, bestFromDays: 12, bestToDays: 28, lastAdvisedDays: 33 };
+    const content = { ...sow.content, offsets };
+    const path = `/api/calendars/${next}/entries/${sow.id}`;
+    await village.officer.put(path, { content, version: sow.version }).expect(200);
+    await changePlace(api, village.placeId, { sameSideShiftDeg: 3 });
+    const { entries } = await reportOf(village.officer, next);
+    const causesOf = (index: number) => entries[index]?.why?.causes.map(({ cause }) => cause) ?? [];
+    expect(entries[0]?.why?.causes).toContainEqual({ cause: 'offsets', days: 5 });
+    expect(causesOf(0)).toContain('threshold');
+    expect(causesOf(1)).toContain('seen');
+    const kept = await api.dataSource.query<{ timing: unknown }[]>('SELECT timing FROM rolled_item');
+    expect(kept).toHaveLength(2);
+    expect(JSON.stringify(kept)).not.toMatch(/Marrun|A-1/u);
   });
 
   it('names what lost its day in the new year: the thirteenth new Moon', async () => {

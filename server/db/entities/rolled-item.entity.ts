@@ -1,3 +1,4 @@
+import type { EntryTiming } from '#shared/calendar/entry-model.js';
 import type { EntryDates } from '#shared/contracts/calendars.js';
 import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
 import { codeColumn } from './columns.js';
@@ -25,4 +26,8 @@ export class RolledItemEntity {
   /** An entry's days in the year before; no words. Null for a variant, and once the thing was taken back. */
   @Column({ type: 'json', nullable: true })
   before!: EntryDates | null;
+
+  /** On what those days rested, without words; null likewise, and for what was rolled over before it was kept. */
+  @Column({ type: 'json', nullable: true })
+  timing!: EntryTiming | null;
 }

@@ -1,6 +1,7 @@
+import type { PlaceSnapshot } from '#shared/contracts/stars.js';
 import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import { CalendarEntity } from './calendar.entity.js';
-import { instantColumn } from './columns.js';
+import { codeColumn, instantColumn } from './columns.js';
 
 /** A calendar whose draft began as that of the year before. */
 @Entity({ name: 'rollover' })
@@ -20,4 +21,11 @@ export class RolloverEntity {
 
   @Column({ name: 'rolled_at', ...instantColumn })
   rolledAt!: Date;
+
+  /** As the place stood then, without the village's figures; null for what was rolled over before it was kept. */
+  @Column({ type: 'json', nullable: true })
+  place!: PlaceSnapshot | null;
+
+  @Column({ name: 'engine_version', ...codeColumn(32), nullable: true })
+  engineVersion!: string | null;
 }

@@ -18,6 +18,7 @@ import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
 import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-without-address.js';
 import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
+import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -41,4 +42,5 @@ export const MIGRATIONS = [
   PeopleWithoutAddress1798510000000,
   CalendarFeeds1798600000000,
   Rollovers1798800000000,
+  RolloverGrounds1799100000000,
 ];

@@ -1,10 +1,10 @@
 import { anchorOf } from '#shared/calendar/anchors.js';
 import { entryDatesFromDays, entryDatesOf, type AnchorDays } from '#shared/calendar/entry-dates.js';
-import { isStarLead } from '#shared/calendar/entry-model.js';
+import { isStarLead, type EntryTiming } from '#shared/calendar/entry-model.js';
 import type { EntryDates, EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import type { FrozenMarker } from '#shared/contracts/versions.js';
-import { resolveMarker } from '#shared/sky/index.js';
+import { resolveMarker, type MarkerYear } from '#shared/sky/index.js';
 import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { SkyMarkerYearsService } from '../sky-markers/sky-marker-years.service.js';
@@ -27,15 +27,29 @@ export class SkyDatesService {
         .markerYears(place, year, firstAndLastKeysOf(contents))
         .map((markerYear) => [markerYear.markerKey, markerYear]),
     );
-    return contents.map((content) => {
-      const { lead } = content;
-      if (lead.type === 'sky') {
-        return entryDatesOf(content, year, this.skyMarkers.year(place, year, lead.spec));
-      }
-      if (anchorOf(lead) !== null) return entryDatesFromDays(content, year, null, UNTOLD);
-      const markerYear = isStarLead(lead) ? (markerYears.get(lead.markerKey) ?? null) : null;
-      return entryDatesOf(content, year, markerYear);
-    });
+    return contents.map((content) => this.dated(place, year, content, markerYears));
+  }
+
+  /** Dates of one timing, as `datesOf` gives them. */
+  timingDates(place: WatchedPlace, year: number, timing: EntryTiming): EntryDates {
+    const keys = isStarLead(timing.lead) ? [timing.lead.markerKey] : [];
+    const markerYears = this.years.markerYears(place, year, keys);
+    return this.dated(place, year, timing, new Map(markerYears.map((each) => [each.markerKey, each])));
+  }
+
+  private dated(
+    place: WatchedPlace,
+    year: number,
+    timing: EntryTiming,
+    markerYears: ReadonlyMap<string, MarkerYear>,
+  ): EntryDates {
+    const { lead } = timing;
+    if (lead.type === 'sky') {
+      return entryDatesOf(timing, year, this.skyMarkers.year(place, year, lead.spec));
+    }
+    if (anchorOf(lead) !== null) return entryDatesFromDays(timing, year, null, UNTOLD);
+    const markerYear = isStarLead(lead) ? (markerYears.get(lead.markerKey) ?? null) : null;
+    return entryDatesOf(timing, year, markerYear);
   }
 
   /** The stars and figures that entries go by, each once and in the order of the keys, with names and the year's strip. */

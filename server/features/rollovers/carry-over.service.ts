@@ -1,4 +1,7 @@
-import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
+import { leadForAnotherYear } from '#shared/calendar/anchors.js';
+import type { EntryTiming } from '#shared/calendar/entry-model.js';
+import { wordlessTiming } from '#shared/calendar/wordless-timing.js';
+import type { EntryInput } from '#shared/contracts/calendars.js';
 import { randomUUID } from 'node:crypto';
 import { In, type EntityManager } from 'typeorm';
 import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
@@ -36,16 +39,17 @@ export async function carryOver(
     await copySharing(manager, 'entry', row.id, newId(row.id));
     await manager.insert(RolledItemEntity, {
       ...{ itemId: newId(row.id), itemType: 'entry', fromId: row.id, calendarId, before: dates },
+      timing: timingBefore(row.content, newIdOf),
     });
   }
   for (const { id, entryId, content, addedAt, updatedBy } of variants) {
     await manager.insert(EntryVariantEntity, {
       ...{ id: newId(id), entryId: newId(entryId), addedAt, updatedBy, updatedAt: at },
-      content: { ...content, lead: ledNextYear(content.lead, newIdOf) },
+      content: { ...content, lead: leadForAnotherYear(content.lead, newIdOf) },
     });
     await copySharing(manager, 'variant', id, newId(id));
     await manager.insert(RolledItemEntity, {
-      ...{ itemId: newId(id), itemType: 'variant', fromId: id, calendarId, before: null },
+      ...{ itemId: newId(id), itemType: 'variant', fromId: id, calendarId, before: null, timing: null },
     });
   }
 }
@@ -53,14 +57,14 @@ export async function carryOver(
 /** The same words; what points at another thing of the draft points at that thing's own next year. */
 function nextYears(content: EntryInput, newIdOf: ReadonlyMap<string, string>): EntryInput {
   const { board } = content;
-  const moved = { ...content, lead: ledNextYear(content.lead, newIdOf) };
+  const moved = { ...content, lead: leadForAnotherYear(content.lead, newIdOf) };
   if (board === undefined || board.variantId === null) return moved;
   return { ...moved, board: { ...board, variantId: newIdOf.get(board.variantId) ?? board.variantId } };
 }
 
-/** A star that was seen this year has not been seen next year; other work is counted from that work's own next year. */
-function ledNextYear<L extends EntryLead>(lead: L, newIdOf: ReadonlyMap<string, string>): L {
-  if (lead.type === 'marker-as-seen') return { ...lead, seen: null };
-  if (!('entryId' in lead)) return lead;
-  return { ...lead, entryId: newIdOf.get(lead.entryId) ?? lead.entryId };
+/** On what the days of the old year rest, told by the things of the new draft. */
+function timingBefore(content: EntryInput, newIdOf: ReadonlyMap<string, string>): EntryTiming {
+  const { lead } = content;
+  const known = lead.type === 'marker-as-seen' ? lead : leadForAnotherYear(lead, newIdOf);
+  return wordlessTiming({ ...content, lead: known });
 }

@@ -1,4 +1,8 @@
 import { CALENDAR_LAST_YEAR } from '#shared/contracts/calendars.js';
+import { wordlessTiming } from '#shared/calendar/wordless-timing.js';
+import type { EntryDates } from '#shared/contracts/calendars.js';
+import type { PlaceSnapshot } from '#shared/contracts/stars.js';
+import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type { RolledCalendar, RolloverReport } from '#shared/contracts/rollovers.js';
 import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
@@ -19,6 +23,7 @@ import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { lockCalendar, readDraft, recordContribution, type DraftEntry } from '../calendars/draft.service.js';
 import { markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { personNames } from '../people/person-names.service.js';
+import type { WhyMovedService } from '../versions/why-moved.service.js';
 import { carryOver } from './carry-over.service.js';
 import { toRolledEntry } from './rollovers.mapper.js';
 
@@ -28,6 +33,7 @@ export class RolloversService {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly sky: SkyDatesService,
+    private readonly reasons: WhyMovedService,
   ) {}
 
   async rollOver(actor: Actor, fromCalendarId: string): Promise<RolledCalendar> {
@@ -42,8 +48,8 @@ export class RolloversService {
         if (!(await manager.existsBy(RolloverEntity, known))) throw conflict('calendar-exists');
         return { calendarId: next.id, hasReport: next.submissionCount === 0 };
       }
-      const { entries } = await readDraft(manager, this.sky, from);
-      const calendarId = await this.begin(manager, actor, from, year);
+      const { place, entries } = await readDraft(manager, this.sky, from);
+      const calendarId = await this.begin(manager, actor, from, year, place);
       await carryOver(manager, entries, calendarId, this.clock.now());
       return { calendarId, hasReport: true };
     });
@@ -59,12 +65,13 @@ export class RolloversService {
     });
     if (rollover === null || calendar === null || calendar.submissionCount > 0) throw notFound();
     const from = await manager.findOneByOrFail(CalendarEntity, { id: rollover.fromCalendarId });
-    const { entries } = await readDraft(manager, this.sky, calendar);
+    const { place, entries } = await readDraft(manager, this.sky, calendar);
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const sight = await entrySight(manager, viewer, entries.map(thingOf));
     const seen = entries.filter((entry) => sight.appearance(thingOf(entry)) === 'full');
     const rows = await manager.findBy(RolledItemEntity, { calendarId, itemType: 'entry' });
-    const beforeOf = new Map(rows.map(({ itemId, before }) => [itemId, before]));
+    const rolledOf = new Map(rows.map((row) => [row.itemId, row]));
+    const placeBefore = { ...(rollover.place ?? place), figures: place.figures };
     const inUse = `${String(calendar.year)}-01-01`;
     const needs = await consentNeeded(manager, seen, viewer.today > inUse ? viewer.today : inUse);
     const names = await personNames(manager, [rollover.rolledBy]);
@@ -79,10 +86,22 @@ export class RolloversService {
       rolledAt: rollover.rolledAt.toISOString(),
       rolledBy: names.get(rollover.rolledBy) ?? '',
       entries: seen.flatMap((entry) => {
-        const before = beforeOf.get(entry.row.id);
+        const { before, timing } = rolledOf.get(entry.row.id) ?? {};
         if (!before) return [];
-        const years = calendar.year - from.year;
-        return [toRolledEntry({ entry, before, years, needsConsent: needs.has(entry.row.id) })];
+        const { content } = entry.row;
+        const sideBefore = {
+          ...{ year: from.year, place: placeBefore, engineVersion: rollover.engineVersion ?? ENGINE_VERSION },
+          timing: timing ?? wordlessTiming(content),
+        };
+        const sideAfter = {
+          ...{ year: calendar.year, place, engineVersion: ENGINE_VERSION },
+          ...{ timing: wordlessTiming(content), dates: entry.dates },
+        };
+        const facts = {
+          ...{ entry, before, years: calendar.year - from.year, needsConsent: needs.has(entry.row.id) },
+          why: (dates: EntryDates) => this.reasons.of({ ...sideBefore, dates }, sideAfter),
+        };
+        return [toRolledEntry(facts)];
       }),
     };
   }
@@ -92,6 +111,7 @@ export class RolloversService {
     actor: Actor,
     { communityId, placeId, id: fromCalendarId }: CalendarEntity,
     year: number,
+    { figures: _figures, ...place }: PlaceSnapshot,
   ): Promise<string> {
     const calendarId = randomUUID();
     const at = this.clock.now();
@@ -104,7 +124,10 @@ export class RolloversService {
       throw isDuplicate(error) ? conflict('calendar-exists') : error;
     }
     const rolledBy = actor.person.id;
-    await manager.insert(RolloverEntity, { calendarId, fromCalendarId, rolledBy, rolledAt: at });
+    await manager.insert(RolloverEntity, {
+      ...{ calendarId, fromCalendarId, rolledBy, rolledAt: at },
+      ...{ place, engineVersion: ENGINE_VERSION },
+    });
     await recordContribution(manager, calendarId, actor.person.id, at);
     await recordAudit(manager, {
       ...{ at, communityId, actorId: actor.person.id, action: 'calendar-rolled-over' },

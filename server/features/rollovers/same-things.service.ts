@@ -24,5 +24,5 @@ export async function sameInOtherYears(
 
 /** Its days in the year before go with it; that it was the same thing stays, so that taking back finds every year. */
 export async function forgetRolledDays(manager: EntityManager, itemId: string): Promise<void> {
-  await manager.update(RolledItemEntity, { itemId }, { before: null });
+  await manager.update(RolledItemEntity, { itemId }, { before: null, timing: null });
 }

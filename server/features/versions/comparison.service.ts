@@ -1,10 +1,19 @@
 import { compareEntries, compareHeaders } from '#shared/calendar/comparison.js';
-import type { Comparison, EntryComparison } from '#shared/contracts/versions.js';
+import type {
+  Comparison,
+  EntryComparison,
+  VersionEntryBody,
+  VersionHeader,
+} from '#shared/contracts/versions.js';
 import type { Actor } from '../../http/actor.js';
 import type { FrozenContentService } from './frozen-content.service.js';
+import type { MovedSide, WhyMovedService } from './why-moved.service.js';
 
 export class ComparisonService {
-  constructor(private readonly contents: FrozenContentService) {}
+  constructor(
+    private readonly contents: FrozenContentService,
+    private readonly reasons: WhyMovedService,
+  ) {}
 
   /** Both sides of one calendar; either may be the draft, for those who see it. */
   async compare(actor: Actor, calendarId: string, from: string, to: string): Promise<Comparison> {
@@ -19,6 +28,7 @@ export class ComparisonService {
         before: was,
         after: is,
         fields,
+        ...this.why(before.header, was, after.header, is),
       }),
     );
     const count = (change: EntryComparison['change']) =>
@@ -42,4 +52,19 @@ export class ComparisonService {
       entries,
     };
   }
+
+  private why(
+    headerBefore: VersionHeader,
+    before: VersionEntryBody | null,
+    headerAfter: VersionHeader,
+    after: VersionEntryBody | null,
+  ): Pick<EntryComparison, 'why'> {
+    if (before === null || after === null) return {};
+    const why = this.reasons.of(sideOf(headerBefore, before), sideOf(headerAfter, after));
+    return why === null ? {} : { why };
+  }
+}
+
+function sideOf({ year, place, engineVersion }: VersionHeader, body: VersionEntryBody): MovedSide {
+  return { year, place, engineVersion, timing: body.content, dates: body.dates };
 }

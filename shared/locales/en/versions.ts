@@ -210,6 +210,28 @@ export const texts = {
     },
   },
 
+  topic: {
+    label: 'What the differences are about',
+    all: 'Everything',
+    dates: 'Days',
+    text: 'Words',
+    levels: 'Who may see it',
+    people: 'People',
+    only: {
+      dates_one: '{{count}} entry differs in its days.',
+      dates_other: '{{count}} entries differ in their days.',
+      text_one: '{{count}} entry differs in its words.',
+      text_other: '{{count}} entries differ in their words.',
+      levels_one: '{{count}} entry differs in who may see it or whether it is printed.',
+      levels_other: '{{count}} entries differ in who may see them or whether they are printed.',
+      people_one: '{{count}} entry differs in its people.',
+      people_other: '{{count}} entries differ in their people.',
+    },
+  },
+
+  /** What a side holds that is not shown; its name stands before it. */
+  notShown: 'In {{name}}:',
+
   /** One whole sentence for each thing that can differ. */
   sentence: {
     added: 'New: {{window}}.',

@@ -3,6 +3,7 @@ import { Link } from 'react-router-dom';
 import type { RolledEntry, RolloverReport } from '#shared/contracts/rollovers.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { paths } from '#src/lib/paths.js';
+import { WhyMovedLines } from '#src/lib/why-moved-lines.js';
 import { Table } from '#src/ui/table.js';
 import type { RolledGroup } from '../model/rolled-groups.js';
 
@@ -46,7 +47,14 @@ export function RolledTable({ group, entries, report }: RolledTableProps) {
             </th>
             <td>{words.window(entry, entry.before.window, from)}</td>
             <td>{words.window(entry, entry.after.window, year)}</td>
-            <td>{moveWords(entry.movedDays)}</td>
+            <td>
+              {moveWords(entry.movedDays)}
+              {entry.why && (
+                <div className="text-small text-umber-soft">
+                  <WhyMovedLines why={entry.why} />
+                </div>
+              )}
+            </td>
           </tr>
         ))}
       </tbody>

@@ -4,8 +4,10 @@ import type { Comparison, EntryComparison } from '#shared/contracts/versions.js'
 import { Chip, type ChipTone } from '#src/ui/chip.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { StateIcon, type StateIconKey } from '#src/ui/icons/state-icon.js';
+import { WhyMovedLines } from '#src/lib/why-moved-lines.js';
+import type { ChangeTopic } from '../model/change-topics.js';
 import { changeWord, type ChangeWord } from '../model/entry-change.js';
-import { entrySentences, paragraphs, type CompareWords } from '../model/entry-sentences.js';
+import { entrySentences, paragraphs, sentencesAbout, type CompareWords } from '../model/entry-sentences.js';
 import { skyReasons } from '../model/header-sentences.js';
 import { BeforeNow } from './before-now.js';
 import { SentenceLine } from './sentence-line.js';
@@ -16,6 +18,7 @@ interface CompareEntryProps {
   comparison: Comparison;
   words: CompareWords;
   reasons: CompareReasons;
+  topic: ChangeTopic | null;
 }
 
 const CHIPS: Record<ChangeWord, { icon: StateIconKey; tone: ChipTone }> = {
@@ -27,14 +30,15 @@ const CHIPS: Record<ChangeWord, { icon: StateIconKey; tone: ChipTone }> = {
 };
 
 /** One entry: what changed in a sentence, the bars before and now, then why and who. */
-export function CompareEntry({ entry, comparison, words, reasons }: CompareEntryProps) {
+export function CompareEntry({ entry, comparison, words, reasons, topic }: CompareEntryProps) {
   const { t } = useTranslation('versions');
   const word = changeWord(entry);
   const chip = CHIPS[word];
-  const told = paragraphs(entrySentences(entry, comparison.year, words));
+  const told = paragraphs(sentencesAbout(entrySentences(entry, comparison.year, words), topic));
+  const ofDays = topic === null || topic === 'dates';
   const icon = (entry.after ?? entry.before)?.content.icon;
   const markerMoved = entry.fields.some(({ field }) => field === 'dates.marker');
-  const because = markerMoved ? skyReasons(comparison.header) : [];
+  const because = markerMoved && ofDays && entry.why === undefined ? skyReasons(comparison.header) : [];
   const who = reasons(entry);
   return (
     <section className="board compared" aria-label={entry.titleOfficer}>
@@ -58,9 +62,10 @@ export function CompareEntry({ entry, comparison, words, reasons }: CompareEntry
             ))}
           </p>
         ))}
-        <BeforeNow entry={entry} year={comparison.year} words={words} />
-        {(because.length > 0 || who.length > 0) && (
+        {ofDays && <BeforeNow entry={entry} year={comparison.year} words={words} />}
+        {(because.length > 0 || who.length > 0 || (ofDays && entry.why)) && (
           <div className="mt-2 text-small text-umber-soft">
+            {ofDays && entry.why && <WhyMovedLines why={entry.why} />}
             {because.map((sentence) => (
               <p key={sentence.key}>
                 <SentenceLine sentence={sentence} />

@@ -15,9 +15,11 @@ import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { comparisonQuery } from '../api/comparison-query.js';
+import { CHANGE_TOPICS } from '../model/change-topics.js';
 import { sideChoices, sidesOf, type Sides } from '../model/compare-sides.js';
 import { CompareResult, type Show } from './compare-result.js';
 import { CompareSides } from './compare-sides.js';
+import { useVersionName } from './use-version-name.js';
 
 /** What changed between two versions of a calendar, in sentences. */
 export function ComparePage() {
@@ -93,6 +95,8 @@ function Compared({
   const { t } = useTranslation('versions');
   const words = useProblemWords();
   const [show, setShow] = useState<Show>('changed');
+  const [search, setSearch] = useSearchParams();
+  const topic = CHANGE_TOPICS.find((each) => each === search.get('about')) ?? null;
   const comparison = useQuery({
     ...comparisonQuery(calendarId, sides.from, sides.to),
     enabled: sides.from !== sides.to,
@@ -122,15 +126,28 @@ function Compared({
         seesDrafts={seesDrafts}
         show={show}
         onShow={setShow}
+        topic={topic}
+        onTopic={(about) => {
+          setSearch({ ...sides, ...(about && { about }) }, { replace: true, preventScrollReset: true });
+        }}
       />
-      {sides.to !== 'draft' && <KeptInNewer calendarId={calendarId} number={Number(sides.to)} />}
+      {[sides.from, sides.to].map(
+        (side) => side !== 'draft' && <NotShown key={side} calendarId={calendarId} number={Number(side)} />,
+      )}
     </>
   );
 }
 
-/** What the newer side holds beyond what this person sees. */
-function KeptInNewer({ calendarId, number }: { calendarId: string; number: number }) {
+/** What a side holds beyond what this person sees, and how much of it was withdrawn: never what it was. */
+function NotShown({ calendarId, number }: { calendarId: string; number: number }) {
+  const { t } = useTranslation('versions');
   const { data: version } = useQuery(versionQuery(calendarId, number));
-  if (version === undefined) return null;
-  return <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />;
+  const nameOf = useVersionName();
+  if (version === undefined || version.keptCount + version.withdrawnCount === 0) return null;
+  return (
+    <div className="mt-3">
+      <p className="text-small">{t('notShown', { name: nameOf(version) })}</p>
+      <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />
+    </div>
+  );
 }

@@ -4,6 +4,7 @@ import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { Columns } from '#src/ui/page.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
+import { aboutTopic, CHANGE_TOPICS, type ChangeTopic } from '../model/change-topics.js';
 import { differing } from '../model/entry-change.js';
 import { headerSentences } from '../model/header-sentences.js';
 import { CompareEntry } from './compare-entry.js';
@@ -21,22 +22,26 @@ interface CompareResultProps {
   seesDrafts: boolean;
   show: Show;
   onShow: (show: Show) => void;
+  topic: ChangeTopic | null;
+  onTopic: (topic: ChangeTopic | null) => void;
 }
 
 /** First how many, then one sentence an entry, then the reason and who. */
-export function CompareResult({ calendarId, comparison, seesDrafts, show, onShow }: CompareResultProps) {
+export function CompareResult(props: CompareResultProps) {
+  const { calendarId, comparison, seesDrafts, show, onShow, topic, onTopic } = props;
   const { t } = useTranslation('versions');
   const { entries, year, header } = comparison;
   const words = useCompareWords(year, useCompareNames(calendarId, comparison));
   const reasons = useCompareReasons(calendarId, comparison, seesDrafts);
-  const changed = differing(entries);
+  const changed = aboutTopic(differing(entries), topic);
+  const shown = show === 'all' ? aboutTopic(entries, topic) : changed;
   const same = entries.filter(({ change }) => change === 'same');
   const basis = headerSentences(header);
   return (
     <>
       <CountSentences comparison={comparison} />
       <PickGroup
-        className="compare-show mb-4"
+        className="compare-show mb-3"
         label={t('compare.show')}
         labelForEars
         value={show}
@@ -47,24 +52,35 @@ export function CompareResult({ calendarId, comparison, seesDrafts, show, onShow
           { value: 'table', label: t('compare.asTable') },
         ]}
       />
+      <PickGroup
+        className="compare-show mb-4"
+        label={t('topic.label')}
+        value={topic ?? 'all'}
+        onChange={(next) => {
+          onTopic(next === 'all' ? null : next);
+        }}
+        options={(['all', ...CHANGE_TOPICS] as const).map((value) => ({ value, label: t(`topic.${value}`) }))}
+      />
+      {topic !== null && <p className="mb-3">{t(`topic.only.${topic}`, { count: shown.length })}</p>}
       <Columns wider="first">
         <div className="grid gap-4">
           {show === 'table' ? (
-            <CompareTable comparison={comparison} words={words} />
+            <CompareTable entries={entries} words={words} topic={topic} />
           ) : (
-            (show === 'all' ? entries : changed).map((entry) => (
+            shown.map((entry) => (
               <CompareEntry
                 key={entry.entryId}
                 entry={entry}
                 comparison={comparison}
                 words={words}
                 reasons={reasons}
+                topic={topic}
               />
             ))
           )}
         </div>
         <div className="grid gap-4">
-          {basis.length > 0 && (
+          {basis.length > 0 && (topic === null || topic === 'dates') && (
             <Board title={t('compare.basisTitle')}>
               <ul className="grid gap-2">
                 {basis.map((sentence) => (
@@ -75,7 +91,7 @@ export function CompareResult({ calendarId, comparison, seesDrafts, show, onShow
               </ul>
             </Board>
           )}
-          {show === 'changed' && same.length > 0 && (
+          {show === 'changed' && topic === null && same.length > 0 && (
             <Board title={t('compare.unchanged')}>
               <ul className="grid gap-2">
                 {same.map((entry) => (

@@ -3,6 +3,7 @@ import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput, EntryLead, FixedLastDate } from '#shared/contracts/calendars.js';
 import type { OccurrenceDays } from '#shared/contracts/stars.js';
 import type { EntryComparison, VersionEntryBody } from '#shared/contracts/versions.js';
+import type { ChangeTopic } from './change-topics.js';
 import { daysBetween } from '#shared/kernel/iso-date.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 
@@ -23,6 +24,36 @@ export function paragraphs(sentences: readonly Sentence[]): Sentence[][] {
     else found.push([sentence]);
   }
   return found;
+}
+
+const TEXT_SENTENCES = [
+  'title',
+  'titleVillage',
+  'crop',
+  'otherSigns',
+  'ifLate',
+  'caution',
+  'notes',
+  'kind',
+  'icon',
+];
+const SENTENCES_OF: Readonly<Record<Exclude<ChangeTopic, 'dates'>, readonly string[]>> = {
+  text: [...TEXT_SENTENCES, 'record'],
+  levels: ['level', 'agreedNew', 'agreedGone'],
+  people: ['giver', 'record'],
+};
+const ABOUT_ALL = ['added', 'addedUndated', 'removed', 'removedUndated'];
+
+/** Only sentences about one topic; without one, all of them. */
+export function sentencesAbout(sentences: readonly Sentence[], topic: ChangeTopic | null): Sentence[] {
+  const others = Object.values(SENTENCES_OF).flat();
+  const isAbout = ({ key }: Sentence) => {
+    const [, name = ''] = key.split('.');
+    if (topic === null || ABOUT_ALL.includes(name)) return true;
+    if (topic !== 'dates') return SENTENCES_OF[topic].includes(name);
+    return name !== 'noDateMoves' && !others.includes(name);
+  };
+  return sentences.filter(isAbout);
 }
 
 /** How single things are said; sentences are built around them. */

@@ -130,4 +130,40 @@ describe('what changed', () => {
     expect(within(table).getByRole('rowheader', { name: 'Sow long millet' })).toBeTruthy();
     expect(within(table).queryByRole('rowheader', { name: 'Store-closing day' })).toBeNull();
   });
+
+  it('shows what is about days, words, levels or people alone, and says why days moved', async () => {
+    const why = {
+      moved: { point: 'bestFrom', days: 3 },
+      causes: [
+        { cause: 'skyline', days: 2 },
+        { cause: 'offsets', days: 2 },
+      ],
+      togetherDays: -1,
+    } as const;
+    answerWith({
+      ...answers,
+      [`GET ${path}/comparison`]: () => {
+        const found = comparison();
+        return {
+          ...found,
+          entries: found.entries.map((entry) => (entry.change === 'changed' ? { ...entry, why } : entry)),
+        };
+      },
+    });
+    const { user } = await open();
+    const sow = await screen.findByRole('region', { name: 'Sow long millet' });
+    const causes = within(sow)
+      .getAllByRole('listitem')
+      .map((item) => item.textContent);
+    expect(causes).toEqual([
+      '2 days later: the skyline',
+      '2 days later: the days from the lead, changed by hand',
+      '1 day earlier: several of these acting together',
+    ]);
+    await user.click(screen.getByRole('radio', { name: 'People' }));
+    expect(screen.queryByRole('region', { name: 'Sow long millet' })).toBeNull();
+    expect(screen.getByRole('region', { name: 'Weed' })).toBeTruthy();
+    await user.click(screen.getByRole('radio', { name: 'Days' }));
+    expect(screen.getByText('2 entries differ in their days.')).toBeTruthy();
+  });
 });
