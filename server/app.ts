@@ -4,6 +4,7 @@ import helmet from 'helmet';
 import { randomUUID } from 'node:crypto';
 import path from 'node:path';
 import { pinoHttp } from 'pino-http';
+import { onCommittedWrite } from './db/committed-writes.js';
 import { afterDeathRoutes } from './features/after-death/after-death.routes.js';
 import { AfterDeathService } from './features/after-death/after-death.service.js';
 import { airRoutes } from './features/air/air.routes.js';
@@ -18,6 +19,7 @@ import { AuditListService } from './features/audit/audit-list.service.js';
 import { auditRoutes } from './features/audit/audit.routes.js';
 import { calendarsRoutes } from './features/calendars/calendars.routes.js';
 import { CalendarsService } from './features/calendars/calendars.service.js';
+import { DraftGlanceService } from './features/calendars/draft-glance.service.js';
 import { EntriesService } from './features/calendars/entries.service.js';
 import { SkyDatesService } from './features/calendars/sky-dates.service.js';
 import { ConsentCardService } from './features/consents/consent-card.service.js';
@@ -141,6 +143,8 @@ export interface App {
   /** Looks what waits and sends what is due; null where letters are switched off. */
   letters: LetterRounds | null;
   express: Express;
+  /** Ends the answers that go on, which a stopping server would wait for; no other begins. */
+  endStreams: () => void;
   /** Waits for the calls that have begun, also where whoever called has hung up. */
   settled: () => Promise<void>;
   /** Ids of the endpoints that answer. */
@@ -233,7 +237,11 @@ export function createApp(options: AppOptions): App {
   const versions = new VersionsService(dataSource, clock);
   const publishing = new PublishingService(dataSource, clock, contents, versions);
   const calendars = new CalendarsService(dataSource, clock);
-  calendarsRoutes(mount, calendars, new EntriesService(dataSource, clock, sky));
+  const entries = new EntriesService(dataSource, clock, sky);
+  calendarsRoutes(mount, calendars, entries, new DraftGlanceService(dataSource, clock));
+  const stopWatching = onCommittedWrite(dataSource, (communityId) => {
+    mount.streams.wake(communityId);
+  });
   const whyMoved = new WhyMovedService(sky);
   rolloversRoutes(mount, new RolloversService(dataSource, clock, sky, whyMoved));
   notesRoutes(mount, new NotesService(dataSource, clock));
@@ -289,6 +297,10 @@ export function createApp(options: AppOptions): App {
   app.use(problemHandler(log));
   return {
     express: app,
+    endStreams: () => {
+      stopWatching();
+      mount.streams.close();
+    },
     settled: () => mount.settled(),
     mountedIds: mount.ids,
     letters: letterRounds(options),

@@ -45,7 +45,7 @@ async function main(): Promise<void> {
     const inbox = await openInbox(config);
     const smtpUrl = inbox?.smtpUrl ?? config.mail.smtpUrl;
     const mailer = smtpUrl === null ? null : createSmtpMailer({ url: smtpUrl, from: config.mail.from });
-    const { express, letters, settled } = createApp({
+    const { express, letters, endStreams, settled } = createApp({
       mailer,
       inbox,
       dataSource,
@@ -65,7 +65,7 @@ async function main(): Promise<void> {
     letters?.start(config.mail.roundMs, (error) => {
       log.warn({ err: errorForLog(error) }, 'letters wait for the next round');
     });
-    closeOnSignal(server, log, async () => {
+    closeOnSignal(server, log, endStreams, async () => {
       await settled();
       await letters?.close();
       await inbox?.close();
@@ -138,7 +138,12 @@ function tidyDaily(dataSource: DataSource, clock: Clock, log: Logger): void {
 }
 
 /** Answers what has begun, then lets go of the database; a second signal does not hurry it into a loss. */
-function closeOnSignal(server: Server, log: Logger, letGo: () => Promise<void>): void {
+function closeOnSignal(
+  server: Server,
+  log: Logger,
+  endStreams: () => void,
+  letGo: () => Promise<void>,
+): void {
   let closing = false;
   const close = () => {
     if (closing) return;
@@ -148,6 +153,7 @@ function closeOnSignal(server: Server, log: Logger, letGo: () => Promise<void>):
         log.info('closed');
       });
     });
+    endStreams();
     server.closeIdleConnections();
   };
   for (const signal of ['SIGTERM', 'SIGINT', 'SIGHUP'] as const) process.on(signal, close);

@@ -191,6 +191,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   readChart: 'is stars of the table',
   listCalendars: 'counts what the person sees',
   readCalendar: 'counts what the person sees',
+  watchDraft: 'is ids and numbers of what the person sees',
   listVersions: 'counts what the person sees',
   listHelpable: 'names elders, and observers for keepers',
   listFeeds: 'is ids and days, of the person alone',

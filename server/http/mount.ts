@@ -6,8 +6,10 @@ import { withHandOf, type Actor, type Person } from './actor.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
 import { actorFor, type HelpingRules } from './on-behalf.js';
+import { EventStreams, StreamReply, type Watched } from './event-streams.js';
 import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
 import { PreparedReply } from './reply.js';
+import { sameSession } from './same-session.js';
 import { withUpload, type UploadedFile } from './upload.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
@@ -15,7 +17,7 @@ type Answer<E extends Endpoint> = E['fileType'] extends string
   ? FileReply
   : E['response'] extends z.ZodType
     ? z.input<E['response']> | PreparedReply
-    : FileReply | StoredFileReply | undefined;
+    : FileReply | StoredFileReply | StreamReply | undefined;
 
 export interface Call<E extends Endpoint> {
   params: Parsed<E['params']>;
@@ -35,6 +37,8 @@ type Handler<E extends Endpoint, Who> = (call: Call<E>, who: Who) => Promise<Ans
 export class Mount {
   /** Ids of all that was mounted; a test holds them against the contracts. */
   readonly ids: string[] = [];
+  /** Answers that go on. */
+  readonly streams = new EventStreams();
   private readonly underway = new Set<Promise<unknown>>();
 
   constructor(
@@ -86,9 +90,22 @@ export class Mount {
     });
   }
 
+  /** For a call whose answer goes on: at every look the person is let in anew, in the very session that began it. */
+  forMemberStream<E extends Endpoint>(endpoint: E, watch: (call: Call<E>) => Watched<unknown>): void {
+    if (endpoint.access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
+    this.add(endpoint, async (request, call) => {
+      const actor = await this.actor(endpoint, request);
+      const isSame = sameSession(request);
+      return new StreamReply(actor, watch(call()), async () => {
+        if (!(await isSame())) throw new AppError('not-signed-in');
+        return this.actor(endpoint, request);
+      }) as Answer<E>;
+    });
+  }
+
   /** Waits for the calls that have begun, also where whoever called has hung up. */
   async settled(): Promise<void> {
-    await Promise.allSettled(this.underway);
+    await Promise.allSettled([...this.underway, this.streams.settled()]);
   }
 
   private actor(endpoint: Endpoint, request: Request): Promise<Actor> {
@@ -111,6 +128,7 @@ export class Mount {
       this.underway.add(handling);
       const answer = await handling.finally(() => this.underway.delete(handling));
       if (answer instanceof StoredFileReply) await sendStoredFile(request, response, answer.file);
+      else if (answer instanceof StreamReply) this.streams.begin(request, response, answer);
       else reply(endpoint, response, answer);
     });
   }

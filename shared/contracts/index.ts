@@ -6,6 +6,7 @@ import { auditEndpoints } from './audit.js';
 import { calendarsEndpoints } from './calendars.js';
 import { consentsEndpoints } from './consents.js';
 import { cardsEndpoints } from './cards.js';
+import { draftChangesEndpoints } from './draft-changes.js';
 import { driftEndpoints } from './drift.js';
 import { exportsEndpoints } from './exports.js';
 import { finderEndpoints } from './finder.js';
@@ -52,6 +53,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   airEndpoints,
   figuresEndpoints,
   calendarsEndpoints,
+  draftChangesEndpoints,
   actualDaysEndpoints,
   rolloversEndpoints,
   variantsEndpoints,

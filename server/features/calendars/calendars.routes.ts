@@ -1,10 +1,17 @@
 import { calendarsEndpoints } from '#shared/contracts/calendars.js';
+import { draftChangesEndpoints, draftGlance } from '#shared/contracts/draft-changes.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import type { CalendarsService } from './calendars.service.js';
+import type { DraftGlanceService } from './draft-glance.service.js';
 import type { EntriesService } from './entries.service.js';
 
-export function calendarsRoutes(mount: Mount, calendars: CalendarsService, entries: EntriesService): void {
+export function calendarsRoutes(
+  mount: Mount,
+  calendars: CalendarsService,
+  entries: EntriesService,
+  glances: DraftGlanceService,
+): void {
   mount.forPerson(calendarsEndpoints.list, async ({ query }, person) =>
     wholeList(await calendars.listOf(person, query.communityId ?? null)),
   );
@@ -32,4 +39,9 @@ export function calendarsRoutes(mount: Mount, calendars: CalendarsService, entri
   mount.forMember(calendarsEndpoints.reorderEntries, ({ params, body }, actor) =>
     entries.reorder(actor, params.calendarId, body.entryIds),
   );
+  mount.forMemberStream(draftChangesEndpoints.watch, ({ params, query }) => ({
+    schema: draftGlance,
+    look: (actor) => glances.look(actor, params.calendarId),
+    seconds: query.seconds ?? 0,
+  }));
 }

@@ -512,6 +512,18 @@ export const texts = {
     throwMine: 'Take all of {{name}}’s text',
   },
 
+  /** While others work in the same draft. */
+  live: {
+    saved: '{{name}} saved “{{title}}”.',
+    added: '{{name}} put in “{{title}}”.',
+    gone: '“{{title}}” is not in the draft any more.',
+    many_one: 'Others changed {{count}} entry of the draft.',
+    many_other: 'Others changed {{count}} entries of the draft.',
+    bothWrite:
+      '{{name}} saved this entry while you were writing, and changed what you change. Write on; before you save, choose what stays.',
+    seeBoth: 'See both texts',
+  },
+
   submit: {
     title: 'Submit for review',
     ready: 'This goes to the elders:',

@@ -8,6 +8,7 @@ import { EntryTitles } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import type { SharingValue } from '#src/lib/sharing-fields.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
+import { useDraftChanges } from '../model/use-draft-changes.js';
 import { useEditor, type Writer } from '../model/use-editor.js';
 import { useEntryActions } from '../model/use-entry-actions.js';
 import { useSaveEntry } from '../model/use-save-entry.js';
@@ -65,6 +66,7 @@ function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps
   const { t } = useTranslation('calendars');
   const editor = useEditor(calendar, writer);
   useWantedMarker(editor);
+  useDraftChanges(calendar.id);
   const saving = useSaveEntry(editor);
   const actions = useEntryActions(editor);
   const form = useFormState(editor, saving.problems);

@@ -7,9 +7,13 @@ import type { Editor } from '../model/use-editor.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
 
 /** Why there is nothing to press; said beside the closed button and read with it. */
-export function useSaveReason({ selected, stale }: Editor): { reason: string; note: string } | null {
+export function useSaveReason(
+  { selected, stale }: Editor,
+  { choosingId }: SaveEntry,
+): { reason: string; note: string } | null {
   const { t } = useTranslation('calendars');
-  if (stale) return { reason: t('editor.chooseFirst'), note: t('editor.chooseFirstNote') };
+  if (stale && choosingId === selected?.id)
+    return { reason: t('editor.chooseFirst'), note: t('editor.chooseFirstNote') };
   if (selected?.saved && !selected.unsaved) {
     return { reason: t('editor.nothingToSave'), note: t('editor.nothingChanged') };
   }
@@ -18,7 +22,7 @@ export function useSaveReason({ selected, stale }: Editor): { reason: string; no
 
 export function SaveButton({ editor, saving }: { editor: Editor; saving: SaveEntry }) {
   const { t } = useTranslation('calendars');
-  const closed = useSaveReason(editor);
+  const closed = useSaveReason(editor, saving);
   return (
     <Button
       look="main"

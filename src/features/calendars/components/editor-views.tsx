@@ -32,8 +32,8 @@ export interface ViewParts {
 /** From 1024 px: the strip above, the entry beside the list. */
 export function WideView(parts: ViewParts) {
   const { t } = useTranslation('calendars');
-  const { editor, actions, form } = parts;
-  const closed = useSaveReason(editor);
+  const { editor, actions, form, saving } = parts;
+  const closed = useSaveReason(editor, saving);
   return (
     <Page>
       <Mast title={t('editor.title', { year: editor.calendar.year })} under={<DraftState editor={editor} />}>
@@ -90,9 +90,9 @@ export function ListView(parts: ViewParts) {
 /** On a phone the open entry is a view of its own. */
 export function EntryView(parts: ViewParts) {
   const { t } = useTranslation('calendars');
-  const { editor } = parts;
+  const { editor, saving } = parts;
   const { calendar, shown, selected } = editor;
-  const closed = useSaveReason(editor);
+  const closed = useSaveReason(editor, saving);
   const position = shown.findIndex((entry) => entry.id === selected?.id) + 1;
   const where =
     selected?.saved === null

@@ -54,6 +54,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
   const search = () => {
     setIsChoosing(true);
   };
+  useChoiceAtFirst(editor.stale, () => saving.choose(entry.id));
 
   return (
     <section
@@ -83,7 +84,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
           <p>{saving.overall}</p>
         </Care>
       )}
-      {editor.stale && saved && edit ? (
+      {editor.stale && saved && edit && saving.choosingId === entry.id ? (
         <StaleChoice
           key={saved.version}
           base={edit.base}
@@ -96,6 +97,12 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
         />
       ) : (
         <>
+          {editor.stale && saved && (
+            <Care role="status" className="mt-3">
+              <p>{t('live.bothWrite', { name: saved.updatedBy })}</p>
+              <Button onClick={() => saving.choose(entry.id)}>{t('live.seeBoth')}</Button>
+            </Care>
+          )}
           <EntryWarnings
             form={form}
             entry={entry}
@@ -120,6 +127,14 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
       <ChooseLead editor={editor} form={form} isOpen={isChoosing} onClose={() => setIsChoosing(false)} />
     </section>
   );
+}
+
+/** Two texts that are there when the entry is opened are shown at once; those that come while somebody writes wait. */
+function useChoiceAtFirst(isStale: boolean, choose: () => void): void {
+  const first = useRef({ isStale, choose });
+  useEffect(() => {
+    if (first.current.isStale) first.current.choose();
+  }, []);
 }
 
 /** A new entry begins in its first field; a phone keeps its heading, so that no keyboard covers the view. */

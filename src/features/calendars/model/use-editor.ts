@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { useMemo } from 'react';
+import { useEffect, useMemo } from 'react';
 import type { Calendar, Entry } from '#shared/contracts/calendars.js';
 import type { VersionSummary } from '#shared/contracts/versions.js';
 import {
@@ -51,6 +51,10 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
     }, [writing, entries.data, newStart]),
   );
   const saved = useMemo(() => entries.data?.items ?? [], [entries.data]);
+  const { takeIn } = edits;
+  useEffect(() => {
+    if (canWrite) takeIn(saved);
+  }, [canWrite, takeIn, saved]);
   const shown = useMemo(
     () =>
       shownEntries({

@@ -4,6 +4,8 @@ import { sameJson } from '#shared/kernel/canonical-json.js';
 import { useSession } from '#src/lib/session.js';
 import { contentOf, differsFrom, draftOf, sameContent, type EntryDraft } from './entry-draft.js';
 import { forgetEdit, keepEdit, readEdits, type EntryEdit, type Edits } from './kept-edits.js';
+import { isStale } from './shown-entries.js';
+import { takenIn } from './take-in.js';
 
 const PAUSE_MS = 400;
 
@@ -23,6 +25,8 @@ export interface EntryEdits {
   drop: (entryId: string) => void;
   /** After saving `sent`. What was written while it was on its way stays, over the state that is saved now. */
   settle: (entryId: string, sent: EntryInput, saved: Entry) => void;
+  /** Lays what is written over newer saved states, where nobody has to choose. */
+  takeIn: (saved: readonly Entry[]) => void;
 }
 
 /**
@@ -100,6 +104,20 @@ export function useEntryEdits(calendarId: string): EntryEdits {
     [put, drop],
   );
 
+  const takeIn = useCallback(
+    (saved: readonly Entry[]) => {
+      for (const entry of saved) {
+        const edit = newest.current.get(entry.id);
+        if (!isStale(entry, edit) || edit === undefined) continue;
+        const laid = takenIn(edit, entry);
+        if (laid === null) continue;
+        if (differsFrom(laid.draft, entry.content)) put(entry.id, laid);
+        else drop(entry.id);
+      }
+    },
+    [put, drop],
+  );
+
   return useMemo(
     () => ({
       all,
@@ -111,8 +129,9 @@ export function useEntryEdits(calendarId: string): EntryEdits {
       put,
       drop,
       settle,
+      takeIn,
     }),
-    [all, unkept, change, put, drop, settle],
+    [all, unkept, change, put, drop, settle, takeIn],
   );
 }
 

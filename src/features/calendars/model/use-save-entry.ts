@@ -31,6 +31,10 @@ export interface SaveEntry {
   save: () => Promise<void>;
   /** Saves a text that was joined from two; `theirs` is the saved state that it was joined over. */
   saveJoined: (content: EntryInput, theirs: Entry) => Promise<void>;
+  /** Opens the choice between two texts of an entry. */
+  choose: (entryId: string) => void;
+  /** The entry whose two texts are shown; null while somebody writes on. */
+  choosingId: string | null;
   isSaving: boolean;
   problems: FieldProblems;
   overall: string | null;
@@ -47,6 +51,7 @@ export function useSaveEntry(editor: Editor): SaveEntry {
   const add = useAddEntry(calendar.id);
   const update = useUpdateEntry(calendar.id);
   const [refused, setRefused] = useState<Refused | null>(null);
+  const [choosingId, setChoosingId] = useState<string | null>(null);
 
   const refuse = (entryId: string, content: EntryInput, server: FieldProblems, overall: string | null) => {
     setRefused((before) => ({ entryId, content, server, overall, attempt: (before?.attempt ?? 0) + 1 }));
@@ -58,6 +63,7 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       // The newer state is shown beside this one; see StaleChoice.
       const current = entrySchema.safeParse(problem.current);
       if (current.success) takeEntry(current.data);
+      setChoosingId(entryId);
     } else if (problem?.slug !== 'not-found') {
       const server = problemsFrom(problem?.errors ?? []);
       refuse(entryId, content, server, server.size > 0 ? null : words.problem(cause));
@@ -80,6 +86,7 @@ export function useSaveEntry(editor: Editor): SaveEntry {
           ? await add.mutateAsync(parsed.data)
           : await update.mutateAsync({ entryId, content: parsed.data, version });
       setRefused(null);
+      setChoosingId(null);
       edits.settle(entryId, content, saved);
       if (version === null) selection.open(saved.id);
       say(t('editor.saved', { title: saved.content.titleOfficer }));
@@ -93,6 +100,10 @@ export function useSaveEntry(editor: Editor): SaveEntry {
   return {
     save: async () => {
       if (selected === null) return;
+      if (editor.stale) {
+        setChoosingId(selected.id);
+        return;
+      }
       const version = editor.edits.all.get(selected.id)?.baseVersion ?? selected.saved?.version ?? null;
       await send(selected.id, selected.content, version);
     },
@@ -103,6 +114,8 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       edits.put(theirs.id, { draft: draftOf(content), base, baseVersion, keptAt: new Date().toISOString() });
       await send(theirs.id, content, baseVersion);
     },
+    choose: setChoosingId,
+    choosingId,
     isSaving: add.isPending || update.isPending,
     problems:
       selected === null ? NO_PROBLEMS : shownProblems(selected.content, isRefused, refused, isUnchanged),

@@ -1,0 +1,29 @@
+import type { Entry } from '#shared/contracts/calendars.js';
+import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
+import type { EntryEdit } from './kept-edits.js';
+import { clashesOf, UNITS, type Unit } from './stale-choice.js';
+
+/** A draft keeps every way to lead an entry; they belong to one choice. */
+const LEAD_PARTS = ['leadType', 'marker', 'sky', 'fixed', 'seen', 'nature', 'anchor'] as const;
+
+/**
+ * My writing over the state that somebody else saved meanwhile: what only they changed is taken in, what I write stays.
+ * Null where both changed the same part, or nobody knows what I began from: that is a person's to decide.
+ */
+export function takenIn(edit: EntryEdit, theirs: Entry): EntryEdit | null {
+  if (edit.base === null) return null;
+  const clashes = clashesOf(edit.base, theirs.content, contentOf(edit.draft));
+  if (clashes.some(({ first }) => first === null)) return null;
+  const saved = draftOf(theirs.content);
+  const taken = clashes.filter(({ first }) => first === 'theirs').flatMap(({ unit }) => partsOf(unit));
+  const draft = Object.fromEntries(
+    (Object.keys({ ...edit.draft, ...saved }) as (keyof EntryDraft)[])
+      .map((part) => [part, taken.includes(part) ? saved[part] : edit.draft[part]] as const)
+      .filter(([, value]) => value !== undefined),
+  ) as unknown as EntryDraft;
+  return { ...edit, draft, base: theirs.content, baseVersion: theirs.version };
+}
+
+function partsOf(unit: Unit): readonly (keyof EntryDraft)[] {
+  return unit === 'lead' ? LEAD_PARTS : UNITS[unit];
+}
