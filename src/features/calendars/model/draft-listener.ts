@@ -1,9 +1,15 @@
 import { draftGlance, type DraftGlance } from '#shared/contracts/draft-changes.js';
 
+/** As much of an EventSource as is used. */
+interface DraftStream {
+  addEventListener: (type: string, hear: (event: Event) => void) => void;
+  close: () => void;
+}
+
 /** The way to the server, so that a test can stand in for it. */
 export interface ListenerWays {
   /** Opens a stream; null where the browser has none. */
-  open: () => Pick<EventSource, 'addEventListener' | 'close'> | null;
+  open: () => DraftStream | null;
   /** Asks once, without a stream. */
   ask: () => Promise<string>;
 }
@@ -37,7 +43,7 @@ export function readGlance(json: string): DraftGlance | null {
  * @returns stops listening
  */
 export function listenToDraft(ways: ListenerWays, onGlance: (glance: DraftGlance) => void): () => void {
-  let stream: ReturnType<ListenerWays['open']> = null;
+  let stream: DraftStream | null = null;
   let failures = 0;
   let isOver = false;
   let again: ReturnType<typeof setTimeout> | undefined;
