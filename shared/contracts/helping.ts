@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { pin } from './cards.js';
+import { cardSignIn } from './cards.js';
 import { id, listOf } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
@@ -19,8 +19,8 @@ export type Helpable = z.infer<typeof helpable>;
 
 export const helpingInput = z.strictObject({
   personId: id,
-  /** Typed by the person who is helped: their helper then sees what they see. Null without. */
-  pin: pin.nullable(),
+  /** Their card lies there and they type its PIN: their helper then sees what they see. Null without. */
+  card: cardSignIn.nullable(),
 });
 export type HelpingInput = z.infer<typeof helpingInput>;
 
@@ -41,7 +41,7 @@ export const helpingEndpoints = {
     method: 'POST',
     path: '/api/communities/:communityId/helping',
     summary:
-      'Write for an elder or observer on this device for half an hour; with their PIN one sees what they see',
+      'Write for an elder or observer on this device for half an hour; with their card and PIN one sees what they see',
     access: member('community', ...ROLES),
     params: communityParams,
     body: helpingInput,

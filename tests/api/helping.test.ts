@@ -20,19 +20,21 @@ let api: TestApi;
 let village: Village;
 let version: Version;
 let observer: Client;
+/** What stands on the elder's card. */
+let code: string;
 beforeAll(async () => {
   api = await openTestApi();
 });
 beforeEach(async () => {
   ({ village, version } = await openSubmission(api));
   observer = await api.signIn('observer');
-  await givePin(api, village.steward, village.elder.personId);
+  code = await givePin(api, village.steward, village.elder.personId);
 });
 afterAll(() => api.close());
 
 const home = (client: Client, more = '') => `/api/communities/${client.communityId}${more}`;
 const help = (client: Client, pin: string | null = PIN, personId = village.elder.personId) =>
-  client.post(home(client, '/helping'), { personId, pin });
+  client.post(home(client, '/helping'), { personId, card: pin === null ? null : { code, pin } });
 const answerPath = () => `${versionPath(version)}/entries/${version.entries[0]?.entryId ?? ''}/answer`;
 const readSession = async (client: Client) => (await client.get('/api/session')).body as SessionState;
 const given = async () =>
@@ -41,7 +43,7 @@ const records = async () =>
   ((await village.steward.get(home(village.steward, '/audit'))).body as { items: AuditEvent[] }).items;
 
 describe('helping an elder', () => {
-  it('is begun by anybody of the village with the elder’s PIN, told by the session, and ended by Done', async () => {
+  it('is begun by anybody of the village with the elder’s card and PIN, told by the session, and ended by Done', async () => {
     const began = (await help(observer).expect(200)).body as SessionState;
     expect(began).toMatchObject({
       person: { id: observer.personId },
@@ -65,6 +67,18 @@ describe('helping an elder', () => {
       { displayName: 'Elder A-3', hasPin: false },
     ]);
     expect((await list(village.officer)).map(({ personId }) => personId)).toContain(observer.personId);
+  });
+
+  it('needs the card itself: without it nobody has a try at the PIN, nor can end the card by wrong ones', async () => {
+    const theirs = code;
+    code = await givePin(api, village.steward, village.elder2.personId);
+    for (let tries = 0; tries < 6; tries += 1) {
+      expect((await help(observer)).body).toMatchObject({
+        errors: [{ field: 'card.code', code: 'card-of-another' }],
+      });
+    }
+    code = theirs;
+    await help(observer).expect(200);
   });
 
   it('needs the right PIN, counted on the card; without one it is for those who review', async () => {

@@ -36,6 +36,7 @@ test('an observer types for an elder: the bar says so on every screen, and "agre
   await signIn(page, 'observer');
   await page.goto('/account');
   await page.getByLabel('Whom do you help?').selectOption({ label: 'Elder A-2' });
+  await page.getByLabel('Letters on their card').fill(code);
   await page.getByLabel('Their PIN').fill('9025');
   await page.getByRole('button', { name: 'Begin' }).click();
   await expect(page.getByText('This is not their PIN.')).toBeVisible();

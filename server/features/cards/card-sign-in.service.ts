@@ -69,8 +69,25 @@ export class CardSignInService {
     return settled(outcome);
   }
 
+  /**
+   * A card lies on somebody else's device and its holder types the PIN. Whoever lacks the card has no try at the PIN,
+   * and cannot end the card by wrong ones. Answers the card's id.
+   */
+  async proveCard(
+    communityId: string,
+    personId: string,
+    { code, pin }: { code: string; pin: string },
+  ): Promise<string> {
+    const card = await this.liveCard(this.dataSource.manager, code, false);
+    if (card?.liveFor !== personId || card.communityId !== communityId) {
+      throw invalidField('card.code', 'card-of-another');
+    }
+    await this.provePin(communityId, personId, pin, 'card.pin');
+    return card.id;
+  }
+
   /** An elder types their PIN on somebody else's device, as proof of their word. Wrong ones count as at the door. */
-  async provePin(communityId: string, personId: string, pin: string): Promise<void> {
+  async provePin(communityId: string, personId: string, pin: string, field = 'pin'): Promise<void> {
     const outcome = await inTransaction(this.dataSource, async (manager) => {
       const card = await manager.findOne(SignInCardEntity, {
         where: { liveFor: personId, communityId },
@@ -78,8 +95,8 @@ export class CardSignInService {
       });
       return card?.pinHash ? tryPin(manager, card, pin, this.clock.now()) : 'no-pin';
     });
-    if (outcome === 'no-pin') throw invalidField('pin', 'no-pin');
-    if (outcome === 'wrong') throw invalidField('pin', 'pin-wrong');
+    if (outcome === 'no-pin') throw invalidField(field, 'no-pin');
+    if (outcome === 'wrong') throw invalidField(field, 'pin-wrong');
     settled(outcome);
   }
 

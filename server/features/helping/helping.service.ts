@@ -9,7 +9,7 @@ import type { SessionHelping } from '../../db/entities/session.entity.js';
 import { SignInCardEntity } from '../../db/entities/sign-in-card.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor, type Helped, type Person } from '../../http/actor.js';
-import { AppError, conflict, notFound } from '../../http/app-error.js';
+import { AppError, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
@@ -24,7 +24,7 @@ export class HelpingService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
-    private readonly pins: Pick<CardSignInService, 'provePin'>,
+    private readonly cards: Pick<CardSignInService, 'proveCard'>,
   ) {}
 
   async list(actor: Actor): Promise<Helpable[]> {
@@ -51,26 +51,16 @@ export class HelpingService {
       .toSorted((a, b) => (a.displayName < b.displayName ? -1 : 1));
   }
 
-  /** Without a PIN it is for those who compile, review and sign: they see no more than before. */
-  async start(actor: Actor, { personId, pin }: HelpingInput): Promise<SessionHelping> {
+  /** Without card and PIN it is for those who compile, review and sign: they see no more than before. */
+  async start(actor: Actor, { personId, card: shown }: HelpingInput): Promise<SessionHelping> {
     const { communityId } = actor;
     const who = (await this.list(actor)).find((each) => each.personId === personId);
     if (who === undefined) throw notFound();
-    if (pin === null && !seesDrafts(actor)) throw new AppError('not-allowed', { reason: 'pin-not-shown' });
-    if (pin !== null) await this.pins.provePin(communityId, personId, pin);
-    const now = this.clock.now();
-    const card = await this.dataSource.manager.findOneBy(SignInCardEntity, {
-      communityId,
-      liveFor: personId,
-    });
-    if (pin !== null && card === null) throw conflict('helping-over');
-    await this.record(actor, personId, 'helping-began', pin !== null);
-    return {
-      communityId,
-      personId,
-      cardId: pin === null ? null : (card?.id ?? null),
-      until: addMinutes(now, HELPING_MINUTES).toISOString(),
-    };
+    if (shown === null && !seesDrafts(actor)) throw new AppError('not-allowed', { reason: 'pin-not-shown' });
+    const cardId = shown && (await this.cards.proveCard(communityId, personId, shown));
+    await this.record(actor, personId, 'helping-began', shown !== null);
+    const until = addMinutes(this.clock.now(), HELPING_MINUTES).toISOString();
+    return { communityId, personId, cardId, until };
   }
 
   async end(actor: Actor, { helping }: Kept): Promise<void> {

@@ -4,6 +4,8 @@ export const texts = {
   lead: 'You type, they speak. Everything you write is theirs, and says that you typed it. It ends when you press Done, at the latest after {{count}} minutes. Nobody signs a calendar for somebody else.',
   whom: 'Whom do you help?',
   choose: 'Choose whom you help.',
+  card: 'Letters on their card',
+  cardHint: 'Their card lies beside you: eighteen letters and numbers under its squares.',
   pin: 'Their PIN',
   pinMust: 'They type it themselves: then you see what they see.',
   pinMay:

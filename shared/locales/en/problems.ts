@@ -158,6 +158,7 @@ export const texts = {
     'pin-digits': 'A PIN has four to six numbers.',
     'pin-too-easy': 'This one is easy to guess. Choose other numbers.',
     'pin-wrong': 'This is not their PIN.',
+    'card-of-another': 'These are not the letters of their card. They stand under its squares.',
     'no-pin': 'This person has no card with a PIN. Use their voice instead.',
     'code-length': 'A code has twelve letters and digits.',
     'link-broken': 'The link is not whole. Open it from the letter again.',

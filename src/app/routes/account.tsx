@@ -1,3 +1,4 @@
+import { CardScan } from '#src/features/cards/components/card-scan.js';
 import { HelpingBoard } from '#src/features/helping/components/helping-board.js';
 import { LetterChoiceBoard } from '#src/features/letters/components/letter-choice-board.js';
 import { OwnDataBoard } from '#src/features/privacy/components/own-data-board.js';
@@ -7,7 +8,7 @@ import { HiddenBoard } from '#src/features/withdrawals/components/hidden-board.j
 export function Component() {
   return (
     <AccountPage
-      helping={<HelpingBoard />}
+      helping={<HelpingBoard scan={(onFound) => <CardScan onFound={onFound} />} />}
       letters={<LetterChoiceBoard />}
       hidden={<HiddenBoard />}
       ownData={<OwnDataBoard />}

@@ -1,12 +1,11 @@
-import { ArrowRight, ScanLine } from 'lucide-react';
+import { ArrowRight } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { cardCode } from '#shared/contracts/cards.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
-import { Care } from '#src/ui/surfaces.js';
-import { canScan, useCardScan } from '../model/use-card-scan.js';
+import { CardScan } from './card-scan.js';
 
 /** Scan the squares where the browser can, or type the letters. */
 export function CodeStep({
@@ -22,32 +21,9 @@ export function CodeStep({
   const words = useProblemWords();
   const [code, setCode] = useState('');
   const [isShort, setIsShort] = useState(false);
-  const [scans, setScans] = useState(false);
   return (
     <div className="grid gap-4">
-      {scans ? (
-        <Scan
-          onFound={(found) => {
-            setScans(false);
-            onCode(found);
-          }}
-          onStop={() => {
-            setScans(false);
-          }}
-        />
-      ) : (
-        canScan() && (
-          <Button
-            full
-            icon={<ScanLine aria-hidden size={24} />}
-            onClick={() => {
-              setScans(true);
-            }}
-          >
-            {t('door.scan')}
-          </Button>
-        )
-      )}
+      <CardScan onFound={onCode} />
       <form
         noValidate
         className="grid gap-4"
@@ -81,27 +57,6 @@ export function CodeStep({
           {t('door.next')}
         </Button>
       </form>
-    </div>
-  );
-}
-
-function Scan({ onFound, onStop }: { onFound: (code: string) => void; onStop: () => void }) {
-  const { t } = useTranslation('cards');
-  const { video, isClosed } = useCardScan(onFound);
-  if (isClosed) {
-    return (
-      <Care role="alert">
-        <p>{t('door.noCamera')}</p>
-      </Care>
-    );
-  }
-  return (
-    <div className="grid gap-2">
-      <p role="status">{t('door.scanning')}</p>
-      <video ref={video} className="w-full" muted playsInline aria-label={t('door.scanning')} />
-      <Button look="quiet" onClick={onStop}>
-        {t('door.scanStop')}
-      </Button>
     </div>
   );
 }

@@ -1,9 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
 import { HeartHandshake } from 'lucide-react';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
-import { PIN_MAX } from '#shared/contracts/cards.js';
+import { cardCode, PIN_MAX } from '#shared/contracts/cards.js';
 import { HELPING_MINUTES } from '#shared/contracts/helping.js';
 import { ApiProblem } from '#src/lib/api-problem.js';
 import { useCommunityChoice, useRoles } from '#src/lib/community.js';
@@ -16,15 +16,18 @@ import { Board } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { helpableQuery, useStartHelping } from '../api/helping-api.js';
 
-/** Begin to type for an elder: whom, and their PIN. */
-export function HelpingBoard() {
+/** Reads a card by the camera and hands over its letters. */
+type Scan = (onFound: (code: string) => void) => ReactNode;
+
+/** Begin to type for an elder: whom, their card and their PIN. */
+export function HelpingBoard({ scan }: { scan: Scan }) {
   const { community } = useCommunityChoice();
   const { helping } = useSession();
   if (community === null || helping !== undefined) return null;
-  return <StartForm communityId={community.communityId} />;
+  return <StartForm communityId={community.communityId} scan={scan} />;
 }
 
-function StartForm({ communityId }: { communityId: string }) {
+function StartForm({ communityId, scan }: { communityId: string; scan: Scan }) {
   const { t } = useTranslation('helping');
   const words = useProblemWords();
   const navigate = useNavigate();
@@ -32,8 +35,9 @@ function StartForm({ communityId }: { communityId: string }) {
   const helpable = useQuery(helpableQuery(communityId));
   const start = useStartHelping(communityId);
   const [personId, setPersonId] = useState('');
+  const [code, setCode] = useState('');
   const [pin, setPin] = useState('');
-  const [problem, setProblem] = useState<{ who?: string; pin?: string }>({});
+  const [problem, setProblem] = useState<{ who?: string; code?: string; pin?: string }>({});
   const mayWithout = is('officer', 'elder', 'steward');
 
   const begin = async () => {
@@ -41,16 +45,22 @@ function StartForm({ communityId }: { communityId: string }) {
       setProblem({ who: t('choose') });
       return;
     }
-    if (pin === '' && !mayWithout) {
+    const isShown = !mayWithout || code !== '' || pin !== '';
+    if (isShown && !cardCode.safeParse(code).success) {
+      setProblem({ code: words.field('card-code-length') });
+      return;
+    }
+    if (isShown && pin === '') {
       setProblem({ pin: words.field('pin-digits') });
       return;
     }
     try {
-      await start.mutateAsync({ personId, pin: pin === '' ? null : pin });
+      await start.mutateAsync({ personId, card: isShown ? { code, pin } : null });
       await navigate(paths.today());
     } catch (cause) {
-      const code = cause instanceof ApiProblem ? cause.errors[0]?.code : undefined;
-      setProblem({ pin: code === undefined ? words.problem(cause) : words.field(code) });
+      const [wrong] = cause instanceof ApiProblem ? cause.errors : [];
+      const sentence = wrong === undefined ? words.problem(cause) : words.field(wrong.code);
+      setProblem(wrong?.field === 'card.code' ? { code: sentence } : { pin: sentence });
     }
     setPin('');
   };
@@ -85,6 +95,23 @@ function StartForm({ communityId }: { communityId: string }) {
             ))}
           </SelectField>
         )}
+        {scan((found) => {
+          setCode(found);
+          setProblem({});
+        })}
+        <TextField
+          label={t('card')}
+          hint={t('cardHint')}
+          autoComplete="off"
+          autoCapitalize="characters"
+          spellCheck={false}
+          value={code}
+          problem={problem.code}
+          onChange={(event) => {
+            setCode(event.currentTarget.value);
+            setProblem({});
+          }}
+        />
         <TextField
           label={t('pin')}
           hint={mayWithout ? t('pinMay') : t('pinMust')}
