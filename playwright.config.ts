@@ -1,4 +1,8 @@
+import { existsSync } from 'node:fs';
 import { defineConfig } from '@playwright/test';
+
+/** Debian's own, without windows where that is there; nothing is downloaded. */
+const browsers = ['/usr/bin/chromium-headless-shell', '/usr/bin/chromium'];
 
 /** Browser journeys against the built product. tests/support/journey-product.ts starts it anew for each file. */
 export default defineConfig({
@@ -25,8 +29,7 @@ export default defineConfig({
     // Recording every journey takes a third of its time; `TRACE=1` does it where a failure is not understood.
     trace: process.env['TRACE'] === '1' ? 'retain-on-failure' : 'off',
     launchOptions: {
-      // Debian's own; nothing is downloaded.
-      executablePath: process.env['CHROMIUM'] ?? '/usr/bin/chromium',
+      executablePath: process.env['CHROMIUM'] ?? browsers.find((file) => existsSync(file)) ?? 'chromium',
       args: [
         '--no-sandbox',
         '--disable-gpu',

@@ -8,7 +8,10 @@ const SIZES_PX = [48, 180, 192, 512];
 
 const folder = fileURLToPath(new URL('../public/icons/', import.meta.url));
 const svg = readFileSync(`${folder}dawnpeg.svg`, 'utf8');
-const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: ['--no-sandbox'] });
+const browser = await chromium.launch({
+  executablePath: '/usr/bin/chromium-headless-shell',
+  args: ['--no-sandbox'],
+});
 try {
   for (const size of SIZES_PX) {
     const page = await browser.newPage({ viewport: { width: size, height: size } });

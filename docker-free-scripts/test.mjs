@@ -6,7 +6,7 @@
  *
  * The last line is always `N passed, N failed`.
  */
-import { mkdirSync, rmSync } from 'node:fs';
+import { existsSync, mkdirSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import process from 'node:process';
 import { parseArgs } from 'node:util';
@@ -63,11 +63,21 @@ async function setUp(wanted) {
   const needsDatabase = wanted.includes('api') || wanted.includes('e2e');
   await ensureDebianPackages(
     ...(needsDatabase ? /** @type {const} */ (['mariadb', 'poppler']) : []),
-    ...(wanted.includes('e2e') ? /** @type {const} */ (['chromium']) : []),
     ...(wanted.includes('unit') ? /** @type {const} */ (['poppler']) : []),
   );
+  if (wanted.includes('e2e')) await ensureBrowser();
   await ensureNodePackages();
   mkdirSync(path.join(projectDir, '.tmp'), { recursive: true });
+}
+
+/** Where the quicker edition cannot be had, the whole browser serves as well. */
+async function ensureBrowser() {
+  try {
+    await ensureDebianPackages('chromium');
+  } catch (error) {
+    if (!existsSync('/usr/bin/chromium')) throw error;
+    say('The journeys go through /usr/bin/chromium, and take longer.');
+  }
 }
 
 /** A build that fails is one failure, and the other tests still have their say. @param {() => void} orGoOn */

@@ -14,7 +14,11 @@ const needs = {
     files: ['/usr/sbin/mariadbd', '/usr/bin/mariadb-install-db', '/usr/bin/my_print_defaults'],
     packages: ['mariadb-server-core', 'mariadb-client-core'],
   },
-  chromium: { files: ['/usr/bin/chromium'], packages: ['chromium', 'fonts-dejavu-core'] },
+  // Debian's Chromium without windows: the journeys take three quarters of the time they take in the whole browser.
+  chromium: {
+    files: ['/usr/bin/chromium-headless-shell'],
+    packages: ['chromium-headless-shell', 'fonts-dejavu-core'],
+  },
   poppler: { files: ['/usr/bin/pdftotext', '/usr/bin/pdftoppm'], packages: ['poppler-utils'] },
 };
 
