@@ -171,7 +171,10 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     pauseItem: () => ({ askedById: village.place.id }),
     removeSound: () => ({ askedById: village.place.id }),
     // Without a card there is no PIN: nobody begins to be helped in the middle of this.
-    startHelping: () => ({ personId: village.elderId, card: { code: 'ABC-DEF-GHJ-KLM-NPQ-RST', pin: '9025' } }),
+    startHelping: () => ({
+      personId: village.elderId,
+      card: { code: 'ABC-DEF-GHJ-KLM-NPQ-RST', pin: '9025' },
+    }),
     addConsent: () => ({ ...asked(), itemType: 'entry', itemId: village.entryId }),
     changeConsent: () => ({ content: asked(), ...stale }),
     withdrawConsent: () => stale,
