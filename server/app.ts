@@ -103,6 +103,7 @@ import { CardSignInService } from './features/cards/card-sign-in.service.js';
 import { cardsRoutes } from './features/cards/cards.routes.js';
 import { CardsService } from './features/cards/cards.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
+import { RestoringService } from './features/versions/restoring.service.js';
 import { WhyMovedService } from './features/versions/why-moved.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
 import { PublishingService } from './features/versions/publishing.service.js';
@@ -246,7 +247,13 @@ export function createApp(options: AppOptions): App {
   rolloversRoutes(mount, new RolloversService(dataSource, clock, sky, whyMoved));
   notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
-  versionsRoutes(mount, versions, publishing, new ComparisonService(contents, whyMoved));
+  versionsRoutes(
+    mount,
+    versions,
+    publishing,
+    new ComparisonService(contents, whyMoved),
+    new RestoringService(dataSource, clock),
+  );
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
   const proofs = new ProofsService(attachmentFiles, clock);
   const answers = new AnswersService(dataSource, clock, cardSignIn, proofs);

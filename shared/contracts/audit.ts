@@ -58,6 +58,7 @@ export const AUDIT_ACTIONS = [
   'consent-withdrawn',
   'calendar-begun',
   'calendar-rolled-over',
+  'draft-restored',
   'entry-added',
   'entry-changed',
   'entry-copied',

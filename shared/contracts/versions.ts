@@ -5,6 +5,7 @@ import { frozenVariant } from './variants.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { whyMoved } from './moves.js';
 import { language, ROLES, signOffRule } from './people.js';
+import { restoredDraft } from './restored-draft.js';
 import { markerNames, nightSegment, placeSnapshot } from './stars.js';
 
 export const VERSION_STATES = [
@@ -230,6 +231,15 @@ export const versionsEndpoints = {
     params: calendarParams,
     query: z.strictObject({ from: versionNumber, to: versionNumber }),
     response: comparison,
+  }),
+  restore: defineEndpoint({
+    id: 'restoreVersion',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/restore',
+    summary: 'Set the draft back to what a version says; nothing of it is agreed by that',
+    access: member('calendar', 'officer'),
+    params: numberParams,
+    response: restoredDraft,
   }),
   askChanges: defineEndpoint({
     id: 'askChanges',

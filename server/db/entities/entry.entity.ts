@@ -36,6 +36,10 @@ export class EntryEntity {
   @Column({ name: 'deleted_at', ...instantColumn, nullable: true })
   deletedAt!: Date | null;
 
+  /** Set back to an old version then: answers to what stood in versions before do not count for it. */
+  @Column({ name: 'restored_at', ...instantColumn, nullable: true })
+  restoredAt!: Date | null;
+
   @Column({ name: 'updated_by', type: 'uuid' })
   updatedBy!: string;
 

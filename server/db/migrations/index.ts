@@ -19,6 +19,7 @@ import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-withou
 import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
+import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -43,4 +44,5 @@ export const MIGRATIONS = [
   CalendarFeeds1798600000000,
   Rollovers1798800000000,
   RolloverGrounds1799100000000,
+  RestoredEntries1799110000000,
 ];

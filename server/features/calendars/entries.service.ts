@@ -30,6 +30,7 @@ import { personNames } from '../people/person-names.service.js';
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
+import { orderAmongOthers } from './draft-order.service.js';
 import { lockOpenDraft, readDraft, recordContribution } from './draft.service.js';
 import { expectMayWrite, mayWrite, shareChangedEntry, shareNewEntry } from './entry-sharing.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from './sky-dates.service.js';
@@ -140,16 +141,10 @@ export class EntriesService {
     return this.change(calendarId, async (manager, calendar) => {
       const rows = await liveEntries(manager, calendarId);
       const sight = await this.sight(manager, actor, rows);
-      const ids = rows.map(({ id }) => id);
       const seen = rows.filter((row) => sight.appearance(thingOf(row)) === 'full').map(({ id }) => id);
       if (!sameJson([...seen].sort(), [...entryIds].sort())) throw conflict('order-differs');
       if (!sameJson(seen, entryIds)) {
-        const movable = new Set(seen);
-        const next = [...entryIds];
-        await writeOrder(
-          manager,
-          ids.map((id) => (movable.has(id) ? (next.shift() ?? id) : id)),
-        );
+        await orderAmongOthers(manager, calendarId, entryIds);
         await recordContribution(manager, calendarId, actor.person.id, this.clock.now());
         await this.audit(manager, actor, 'entries-reordered', 'calendar', calendarId, { count: seen.length });
       }

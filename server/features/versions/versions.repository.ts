@@ -1,5 +1,6 @@
 import type { EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { SignatureEntity } from '../../db/entities/signature.entity.js';
 import type { SeenThing } from '../../policy/entry-sight.js';
 import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
@@ -36,7 +37,10 @@ export interface EntrySeal {
   hash: string;
 }
 
-/** Every salt and hash under which the calendar's entries were frozen before, by entry; newest first. */
+/**
+ * Every salt and hash under which the calendar's entries were frozen before, by entry; newest first. Of an entry that was set
+ * back to an old version only what was frozen since: nobody has agreed to it again yet.
+ */
 export async function earlierSeals(
   manager: EntityManager,
   calendarId: string,
@@ -44,11 +48,13 @@ export async function earlierSeals(
   const rows = await manager
     .createQueryBuilder(VersionEntryEntity, 'frozen')
     .innerJoin('frozen.calendarVersion', 'version')
+    .leftJoin(EntryEntity, 'entry', 'entry.id = frozen.entryId')
     .select('frozen.entryId', 'entryId')
     .addSelect('frozen.salt', 'salt')
     .addSelect('frozen.hash', 'hash')
     .addSelect('MAX(version.number)', 'newest')
     .where('version.calendarId = :calendarId', { calendarId })
+    .andWhere('(entry.restoredAt IS NULL OR version.submittedAt > entry.restoredAt)')
     .groupBy('frozen.entryId')
     .addGroupBy('frozen.salt')
     .addGroupBy('frozen.hash')

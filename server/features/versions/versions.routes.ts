@@ -3,6 +3,7 @@ import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import type { ComparisonService } from './comparison.service.js';
 import type { PublishingService } from './publishing.service.js';
+import type { RestoringService } from './restoring.service.js';
 import type { VersionsService } from './versions.service.js';
 
 export function versionsRoutes(
@@ -10,6 +11,7 @@ export function versionsRoutes(
   versions: VersionsService,
   publishing: PublishingService,
   comparison: ComparisonService,
+  restoring: RestoringService,
 ): void {
   mount.forMember(versionsEndpoints.list, async ({ params }, actor) =>
     wholeList(await versions.list(actor, params.calendarId)),
@@ -22,6 +24,9 @@ export function versionsRoutes(
   );
   mount.forMember(versionsEndpoints.compare, ({ params, query }, actor) =>
     comparison.compare(actor, params.calendarId, query.from, query.to),
+  );
+  mount.forMember(versionsEndpoints.restore, ({ params }, actor) =>
+    restoring.restore(actor, params.calendarId, Number(params.number)),
   );
   mount.forMember(versionsEndpoints.askChanges, ({ params, body }, actor) =>
     publishing.askChanges(actor, params.calendarId, Number(params.number), body),

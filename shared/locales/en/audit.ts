@@ -64,6 +64,7 @@ export const texts = {
     'consent-withdrawn': '{{actor}} took back what was agreed about “{{subject}}”.',
     'calendar-begun': '{{actor}} began the calendar {{subject}}.',
     'calendar-rolled-over': '{{actor}} began the calendar {{subject}} from the year before.',
+    'draft-restored': '{{actor}} set the draft of {{subject}} back to what a version says.',
     'entry-added': '{{actor}} added the entry “{{subject}}”.',
     'entry-changed': '{{actor}} changed the entry “{{subject}}”: {{fields}}.',
     'entry-copied': '{{actor}} made a copy: “{{subject}}”.',

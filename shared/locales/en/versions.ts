@@ -163,6 +163,41 @@ export const texts = {
     done: '{{label}} is recalled.',
   },
 
+  restore: {
+    begin: 'Set the draft back to this',
+    question: 'Set the draft back to {{name}}?',
+    does: 'Every entry of the draft that you see says again what it said in {{name}}. What came in since is taken out, what was taken out comes back.',
+    never:
+      'What was withdrawn stays away. Who may see an entry, and whose it is, stays as it is today. What you do not see is not touched.',
+    nothingAgreed: 'Nothing is agreed by this: elders answer to what is set back as to something new.',
+    look: 'See first what would change',
+    yes: 'Set it back',
+    done: 'The draft says what {{name}} says.',
+    reportTitle: 'The draft, set back to {{name}}',
+    open: 'Open the draft',
+    outcome: {
+      'set-back_one': '{{count}} entry says again what it said:',
+      'set-back_other': '{{count}} entries say again what they said:',
+      'brought-back_one': '{{count}} entry that was taken out is back:',
+      'brought-back_other': '{{count}} entries that were taken out are back:',
+      'taken-out_one': '{{count}} entry that came in later is taken out:',
+      'taken-out_other': '{{count}} entries that came in later are taken out:',
+      left_one: '{{count}} entry is left as it is today:',
+      left_other: '{{count}} entries are left as they are today:',
+      'as-it-was_one': '{{count}} entry said this already.',
+      'as-it-was_other': '{{count}} entries said this already.',
+    },
+    leftBecause: {
+      'sign-gone': '{{title}}: what it went by is not there any more',
+      circle: '{{title}}: it would be counted from itself',
+      'not-yours': '{{title}}: it is not yours to write',
+    },
+    sharingStays_one: 'For {{count}} entry, who may see it or whose it is stays as it is today:',
+    sharingStays_other: 'For {{count}} entries, who may see them or whose they are stays as it is today:',
+    withdrawn_one: '{{count}} entry of it was withdrawn since and does not come back.',
+    withdrawn_other: '{{count}} entries of it were withdrawn since and do not come back.',
+  },
+
   compare: {
     title: 'What changed',
     under: 'Calendar {{year}}, {{place}}',

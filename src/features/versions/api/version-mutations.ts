@@ -39,3 +39,12 @@ export function useRecall(calendarId: string, number: number) {
     onSuccess,
   });
 }
+
+/** Sets the draft back to what a version says; answers what became of each entry. */
+export function useRestore(calendarId: string, number: number) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: () => callApi(versionsEndpoints.restore, { params: { calendarId, number: String(number) } }),
+    onSettled: () => client.invalidateQueries({ queryKey: calendarKeys.all }),
+  });
+}

@@ -3,7 +3,7 @@ import { GitCompareArrows, Layers, Printer } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Navigate, useParams } from 'react-router-dom';
-import { wasPublished } from '#shared/calendar/version-state.js';
+import { isOut, wasPublished } from '#shared/calendar/version-state.js';
 import {
   submissionNumber,
   type Version,
@@ -15,6 +15,7 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { EntryTitles, titlesOf } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
+import { useRolesIn } from '#src/lib/roles-in.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Columns, Mast, Page } from '#src/ui/page.js';
 import { StateChip } from '#src/ui/state-chip.js';
@@ -23,6 +24,7 @@ import { BasisBoard } from './basis-board.js';
 import { FrozenEntries } from './frozen-entries.js';
 import { FrozenStrip } from './frozen-strip.js';
 import { MissingBoard } from './missing-board.js';
+import { RestoreDraft } from './restore-draft.js';
 import { SealBoard } from './seal-board.js';
 import { SignaturesBoard } from './signatures-board.js';
 import { useVersionName } from './use-version-name.js';
@@ -60,7 +62,8 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
   const older = versions.find((each) => each.number < number) ?? null;
   const name = useVersionName()(version);
   usePageTitle(name);
-  const isOpen = version.state === 'in-review' || version.state === 'signed-off';
+  const { isOfficer } = useRolesIn(calendar.communityId);
+  const isOpen = isOut(version.state);
   return (
     <Page>
       <Mast
@@ -74,7 +77,7 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
         backTo={paths.versions(calendarId)}
       />
       <Columns wider="first" className="mb-4">
-        <StateBoard version={version} older={older} />
+        <StateBoard version={version} older={older} mayRestore={isOfficer && !isOpen} />
         {isOpen ? <MissingBoard version={version} /> : <SignaturesBoard version={version} />}
       </Columns>
       {review !== undefined && <div className="mb-4">{review(version)}</div>}
@@ -94,8 +97,14 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
   );
 }
 
+interface StateBoardProps {
+  version: Version;
+  older: VersionSummary | null;
+  mayRestore: boolean;
+}
+
 /** What its state means, who submitted it when, and the ways on. */
-function StateBoard({ version, older }: { version: Version; older: VersionSummary | null }) {
+function StateBoard({ version, older, mayRestore }: StateBoardProps) {
   const { t } = useTranslation('versions');
   const dates = useDateWords();
   const { calendarId, number, state } = version;
@@ -128,6 +137,7 @@ function StateBoard({ version, older }: { version: Version; older: VersionSummar
           {t('page.versions')}
         </ButtonLink>
       </div>
+      {mayRestore && <RestoreDraft version={version} />}
     </Board>
   );
 }
