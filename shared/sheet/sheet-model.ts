@@ -91,6 +91,8 @@ export interface SheetModel {
   readonly contacts: { readonly weather: string; readonly agriculture: string };
   /** What the dates rest on; one statement a line. */
   readonly basis: readonly string[];
+  /** What it says otherwise than the board before it in the same year, a line each; left out for the year's first. */
+  readonly changes?: readonly string[];
   readonly signedBy: string;
   readonly printDate: string;
   readonly words: SheetWords;

@@ -39,6 +39,7 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
   const blocks = [
     ...model.markers.map((marker) => markerRow(model, marker, measurer)),
     ...model.entries.map((entry) => entryRow(model, entry, measurer)),
+    ...changeBlocks(model, measurer),
     ...foot.leftOut.map((text) => plainBlock(text, LEGEND, AREA, measurer)),
   ];
   const spans = Array.from({ length: 12 }, (_, index) =>
@@ -95,6 +96,11 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
       ),
     };
   });
+}
+
+/** Whoever took the old board down finds here what the new one says otherwise. */
+function changeBlocks({ changes = [] }: SheetModel, measurer: TextMeasurer): WordBlock[] {
+  return changes.map((line, index) => plainBlock(line, index === 0 ? LEGEND_BOLD : LEGEND, AREA, measurer));
 }
 
 function columnHeads(model: SheetModel, top: number, measurer: TextMeasurer): Primitive[] {

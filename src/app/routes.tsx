@@ -98,7 +98,7 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.version,
-    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing', 'exports'],
+    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing', 'exports', 'moves'],
     load: () => import('./routes/version.js'),
   },
   {

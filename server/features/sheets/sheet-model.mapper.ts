@@ -7,6 +7,7 @@ import { civilDayOf, moonPhases, moonsBetween } from '#shared/sky/index.js';
 import { sheetWords } from '../../print/sheet-words.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
 import { settingsOf, siteOf } from '../places/watched-place.service.js';
+import { toSheetChanges, type SheetBefore } from './sheet-changes.mapper.js';
 import { toSheetEntries } from './sheet-entries.mapper.js';
 import { toSheetMarkers } from './sheet-markers.mapper.js';
 
@@ -24,6 +25,8 @@ export interface SheetFacts {
   signerNames: readonly string[];
   /** Civil day at the place, `YYYY-MM-DD`. */
   printDate: string;
+  /** The board that this one replaces in the same year. */
+  before?: SheetBefore | undefined;
 }
 
 /** A version, or the draft, as everything that its printed board says. */
@@ -35,6 +38,8 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
   const print = translatorFor(language, 'print');
   const sky = translatorFor(language, 'sky');
   const words = sheetWords({ translate: print, language, year });
+  const changes =
+    facts.before === undefined ? [] : toSheetChanges(facts.before, facts.entries, { files, words });
   return {
     layout,
     paper,
@@ -52,6 +57,7 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     moonBegins: moonBeginsOf(header),
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
     basis: [basisOf(header, files)],
+    ...(changes.length > 0 && { changes }),
     signedBy: listOf(facts.signerNames, language),
     printDate: facts.printDate,
     words,

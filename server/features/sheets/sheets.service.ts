@@ -11,6 +11,7 @@ import { translatorFor } from '../../print/translator.js';
 import { civilDateAt } from '../places/place-day.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import type { VersionsService } from '../versions/versions.service.js';
+import type { SheetBefore } from './sheet-changes.mapper.js';
 import { toSheetModel } from './sheet-model.mapper.js';
 
 /** The peg sheet of whatever version the person may see; anything that is not published carries its state across. */
@@ -63,9 +64,19 @@ export class SheetsService {
         label,
         signerNames: signerNames(signatures),
         printDate: civilDateAt(this.clock.now(), header.place),
+        before: label === null ? undefined : await this.before(actor, calendarId, Number(number)),
       },
       query,
     );
+  }
+
+  /** The board that hung before, as far as it may still be printed. */
+  private async before(actor: Actor, calendarId: string, number: number): Promise<SheetBefore | undefined> {
+    const versions = await this.versions.list(actor, calendarId);
+    const older = versions.find((version) => version.label !== null && version.number < number);
+    if (older === undefined || older.label === null) return undefined;
+    const { entries } = await this.contents.readForBoard(actor, calendarId, String(older.number));
+    return { label: older.label, entries };
   }
 }
 

@@ -178,6 +178,15 @@ export const texts = {
     },
   },
   sheet: {
+    changes: {
+      title: 'Changed since {{label}}',
+      added: '{{title}}: new',
+      removed: '{{title}}: taken off the board',
+      days: '{{title}}: best {{after}}; before, {{before}}',
+      edges: '{{title}}: best {{after}} as before; its earliest or last day moved',
+      words: '{{title}}: other words or signs, same days',
+      noDays: 'no days',
+    },
     fileName: {
       'month-cards': '{{community}} {{issue}} month cards',
       'year-board': '{{community}} {{issue}} year board',

@@ -163,6 +163,12 @@ export const texts = {
     done: '{{label}} is recalled.',
   },
 
+  changes: {
+    title: 'Changed since {{label}}',
+    none: 'No entry says anything else.',
+    more: 'Side by side, with the bars',
+  },
+
   restore: {
     begin: 'Set the draft back to this',
     question: 'Set the draft back to {{name}}?',

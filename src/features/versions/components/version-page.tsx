@@ -21,6 +21,7 @@ import { Columns, Mast, Page } from '#src/ui/page.js';
 import { StateChip } from '#src/ui/state-chip.js';
 import { Board } from '#src/ui/surfaces.js';
 import { BasisBoard } from './basis-board.js';
+import { ChangesBoard } from './changes-board.js';
 import { FrozenEntries } from './frozen-entries.js';
 import { FrozenStrip } from './frozen-strip.js';
 import { MissingBoard } from './missing-board.js';
@@ -60,6 +61,8 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
     queries: [calendarQuery(calendarId), versionQuery(calendarId, number), versionsQuery(calendarId)],
   });
   const older = versions.find((each) => each.number < number) ?? null;
+  const mended =
+    version.label !== null && versions.find((each) => each.label !== null && each.number < number);
   const name = useVersionName()(version);
   usePageTitle(name);
   const { isOfficer } = useRolesIn(calendar.communityId);
@@ -88,6 +91,7 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
         </EntryTitles>
         <div className="grid gap-4">
           {isOpen && <SignaturesBoard version={version} />}
+          {mended && <ChangesBoard version={version} before={mended} />}
           {takeAlong?.(version, calendar.communityId)}
           <BasisBoard header={version.header} />
           <SealBoard version={version} />

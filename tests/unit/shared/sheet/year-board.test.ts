@@ -203,4 +203,15 @@ describe('the year board', () => {
     expect(black).toHaveLength(1);
     expect(black[0]?.middle).toBeCloseTo(hole?.cx ?? 0, 2);
   });
+
+  it('names on the sheet beside it what a mended board says otherwise', () => {
+    const changes = ['Changed since 2027-1', 'Sow: best 16–30 June; before, 14–30 June'];
+    const pages = yearBoard(upperTazimel({ layout: 'year-board', changes }), fontMeasurer);
+    const legend = pages
+      .filter(({ kind }) => kind === 'legend')
+      .map(allWords)
+      .join(' ');
+    for (const line of changes) expect(legend).toContain(line);
+    expect(allWords(tilesOf(pages))).not.toContain('Changed since');
+  });
 });

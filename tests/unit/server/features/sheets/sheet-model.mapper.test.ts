@@ -303,4 +303,31 @@ describe('the rest of the sheet', () => {
     expect(sheet.words.monthName(6).officer).toBe('June');
     expect(sheet.officerLanguage).toBe('en');
   });
+
+  it('says what a mended board says otherwise than the one before it, and nothing of what is not printed', () => {
+    const sow = body({ titleOfficer: 'Sow' });
+    const weed = body({ titleOfficer: 'Weed' });
+    const store = body({ titleOfficer: 'Store' });
+    const window = { ...sow.dates.window, bestFrom: '2027-06-16', lastAdvisedBy: 'offset' } as const;
+    const moved = {
+      ...sow,
+      dates: dates({ window: { ...dates().window, ...window } as EntryDates['window'] }),
+    };
+    const entries = [
+      moved,
+      { ...weed, content: { ...weed.content, ifLate: 'Sow beans' } },
+      { ...store, content: { ...store.content, sharingLevel: 'village' as const } },
+      body({ titleOfficer: 'Fish' }),
+    ];
+    const gone = body({ titleOfficer: 'Burn' });
+    const before = { label: '2027-1', entries: [sow, weed, store, gone] };
+    expect(model(entries, { label: '2027-2', before }).changes).toEqual([
+      'Changed since 2027-1',
+      'Sow: best 16 to 30 June; before, 14 to 30 June',
+      'Weed: other words or signs, same days',
+      'Fish: new',
+      'Burn: taken off the board',
+    ]);
+    expect(model([sow], { before: { label: '2027-1', entries: [sow] } })).not.toHaveProperty('changes');
+  });
 });
