@@ -42,6 +42,8 @@ import { LettersService } from './features/letters/letters.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
+import { signsRoutes } from './features/signs/signs.routes.js';
+import { SignsService } from './features/signs/signs.service.js';
 import { figuresRoutes } from './features/figures/figures.routes.js';
 import { FiguresService } from './features/figures/figures.service.js';
 import { helpingRoutes } from './features/helping/helping.routes.js';
@@ -223,6 +225,7 @@ export function createApp(options: AppOptions): App {
   const stars = new StarsService(places, skyYears);
   placesRoutes(mount, places);
   figuresRoutes(mount, new FiguresService(dataSource, clock));
+  signsRoutes(mount, new SignsService(dataSource, clock));
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));
   airRoutes(mount, new AirService(places, skyYears));

@@ -24,6 +24,7 @@ export const PLANTED_KINDS = [
     'note',
     'figure',
     'story',
+    'sign',
   ] as const),
   ...(['consent', 'figure consent'] as const),
   ...(['recording', 'sound', 'picture title', 'picture', 'thumbnail'] as const),
@@ -123,6 +124,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   exportMoonsCsv: ONE_FIGURE,
   listFigures: { figure: sees, story: sees },
   readFigure: { figure: sees, story: sees, 'led entry': keptSeen },
+  listSigns: { sign: sees },
   listEntries: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
   listVariants: { variant: keptSeen, 'kept variant': keptSeen },
   // The officer who rolled over neither sees nor counts what is kept.
@@ -161,7 +163,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   printConsentCard: ONE_CONSENT,
   listAuditEvents: {
     ...{ entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen, figure: keptSeen },
-    ...{ recording: keptSeen, 'picture title': keptSeen },
+    ...{ recording: keptSeen, 'picture title': keptSeen, sign: keptSeen },
   },
   // What an elder asks the officer to change stands among what waits.
   readToday: { entry: sees, answer: both((person) => person === 'officer', sees) },

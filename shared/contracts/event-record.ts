@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { isoDate, line, monthDay, text } from './common.js';
+import { id, isoDate, line, monthDay, text } from './common.js';
 
 export const RECORD_SIGNS_MAX = 12;
 export const LEAD_DAYS_MAX = 120;
@@ -67,8 +67,8 @@ function wholeDays(max: number) {
   return z.number('not-a-number').int('whole-days').min(0, 'days-range').max(max, 'days-range').nullable();
 }
 
-/** A sign to look out for before the work begins. */
-export const recordSign = z.strictObject({
+/** What is said of a sign: in an entry's own words, or in those of the village's list. */
+export const signWords = z.strictObject({
   type: z.enum(RECORD_SIGN_TYPES),
   /** How people call it. */
   name: line(80, 1),
@@ -78,6 +78,9 @@ export const recordSign = z.strictObject({
   usual: z.strictObject({ from: monthDay, to: monthDay }).nullable(),
   stillSeen: z.enum(STILL_SEEN).nullable(),
 });
+
+/** A sign to look out for before the work begins. One of the village's list is named, and its words stand beside. */
+export const recordSign = signWords.extend({ sharedId: id.optional() });
 export type RecordSign = z.infer<typeof recordSign>;
 
 /** Who of which office read a text and let it stand, and when. */
@@ -144,6 +147,14 @@ const recordFields = z.strictObject({
     late: textCheck.nullable(),
   }),
 });
+
+/** What of a record counting its signs takes. */
+export const awaitedRecord = z.strictObject({
+  signs: recordFields.shape.signs,
+  when: recordFields.shape.when.pick({ leadDays: true, graceDays: true }),
+  work: recordFields.shape.work.pick({ stop: true }),
+});
+export type AwaitedRecord = z.infer<typeof awaitedRecord>;
 
 /**
  * What an event says beside its name, its days and its giver. Empty members say nothing; a record in which nothing is said

@@ -26,6 +26,7 @@ import { rolloversEndpoints } from './rollovers.js';
 import { sessionEndpoints } from './session.js';
 import { sharingEndpoints } from './sharing.js';
 import { sheetsEndpoints } from './sheets.js';
+import { signsEndpoints } from './signs.js';
 import { skyMarkersEndpoints } from './sky-markers.js';
 import { starsEndpoints } from './stars.js';
 import { todayEndpoints } from './today.js';
@@ -52,6 +53,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   moonsEndpoints,
   airEndpoints,
   figuresEndpoints,
+  signsEndpoints,
   calendarsEndpoints,
   draftChangesEndpoints,
   actualDaysEndpoints,

@@ -17,7 +17,15 @@ export const NAMINGS = ['named', 'role', 'not-named'] as const;
 export const GIVER_BY_ROLE = '@role';
 
 /** Everything that has a level of its own. */
-export const SHARED_ITEM_TYPES = ['entry', 'figure', 'story', 'note', 'attachment', 'variant'] as const;
+export const SHARED_ITEM_TYPES = [
+  'entry',
+  'figure',
+  'story',
+  'note',
+  'attachment',
+  'variant',
+  'sign',
+] as const;
 export type SharedItemType = (typeof SHARED_ITEM_TYPES)[number];
 
 /** From–to within the year, both days included; it may reach over New Year. Outside it a thing is as sealed. */

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { id, isoDate } from './common.js';
+import { awaitedRecord } from './event-record.js';
 import { entryIcon, entryWindow } from './calendars.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { ROLES } from './people.js';
@@ -39,6 +40,10 @@ export const openWindow = z.strictObject({
   ifLate: z.string(),
   otherSigns: z.string(),
   hasLastDate: z.boolean(),
+  /** Year of the calendar. */
+  year: z.number().int(),
+  /** What counting its signs takes; left out where none is named. */
+  awaits: awaitedRecord.optional(),
 });
 export type OpenWindow = z.infer<typeof openWindow>;
 

@@ -28,6 +28,7 @@ import { texts as rollovers } from './en/rollovers.js';
 import { texts as session } from './en/session.js';
 import { texts as sharing } from './en/sharing.js';
 import { texts as sheets } from './en/sheets.js';
+import { texts as signs } from './en/signs.js';
 import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
 import { texts as today } from './en/today.js';
@@ -60,6 +61,7 @@ export const en = {
   figures,
   calendars,
   record,
+  signs,
   reviews,
   rollovers,
   sharing,

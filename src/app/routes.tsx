@@ -53,6 +53,11 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['people', 'figures'],
     load: () => import('./routes/village-figures.js'),
   },
+  {
+    path: PATTERNS.villageSigns,
+    texts: ['people', 'signs', 'record', 'sharing'],
+    load: () => import('./routes/village-signs.js'),
+  },
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
   {
     path: PATTERNS.figure,

@@ -24,6 +24,7 @@ import {
 } from '#tests/support/calendar-api.js';
 import { addConsent, asked } from '#tests/support/consent-api.js';
 import { addPicture } from '#tests/support/attachment-api.js';
+import { addSign, markSeen } from '#tests/support/sign-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { plainPicture } from '#tests/support/media.js';
 import { PERMISSION_GUIDE, withPermissionTable } from '../../docker-free-scripts/lib/permission-table.js';
@@ -144,6 +145,7 @@ async function furnishOwn(): Promise<Village> {
     ownEntryId: kept.id,
     personId: added.person.id,
     figureId,
+    ...(await aSeenSign(village.officer)),
     attachmentId: (await addPicture(village.elder, figureId)).id,
     feedKey: feed.key,
     withdrawalId: await aWithdrawal(village.officer.communityId),
@@ -174,6 +176,7 @@ async function furnishOther(): Promise<Village> {
     ownEntryId: entry.id,
     personId: officer.personId,
     figureId,
+    ...(await aSeenSign(officer)),
     attachmentId: (await addPicture(officer, figureId)).id,
     feedKey: '',
     withdrawalId: await aWithdrawal(home.community.id),
@@ -190,6 +193,11 @@ async function furnishOther(): Promise<Village> {
 async function rolledFrom(officer: Client, calendarId: string): Promise<string> {
   const answer = await officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
   return (answer.body as { calendarId: string }).calendarId;
+}
+
+async function aSeenSign(officer: Client): Promise<{ signId: string; seenId: string }> {
+  const { id, seen } = await markSeen(officer, await addSign(officer));
+  return { signId: id, seenId: seen[0]?.id ?? '' };
 }
 
 async function aNote(officer: Client, figureId: string): Promise<string> {

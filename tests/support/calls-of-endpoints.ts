@@ -9,6 +9,7 @@ import { DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { entryInput, says } from '#tests/support/calendar-api.js';
 import { asked, spokenContent } from '#tests/support/consent-api.js';
 import { attachmentInput } from '#tests/support/attachment-api.js';
+import { signInput } from '#tests/support/sign-api.js';
 import { figureInput } from '#tests/support/figure-api.js';
 
 /** Ids of one village that really exist, so that a call that is let in reaches the service. */
@@ -23,6 +24,9 @@ export interface Village {
   ownEntryId: string;
   personId: string;
   figureId: string;
+  signId: string;
+  /** A sighting of somebody who calls nothing here. */
+  seenId: string;
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
   groupId: string;
@@ -63,6 +67,8 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
     entryId: OF_ITS_PEOPLE.has(endpoint.id) ? village.ownEntryId : village.entryId,
     personId: village.personId,
     figureId: village.figureId,
+    signId: village.signId,
+    seenId: village.seenId,
     attachmentId: village.attachmentId,
     part: '1',
     groupId: village.groupId,
@@ -138,6 +144,9 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     createPlace: () => place,
     updatePlace: () => ({ ...place, ...stale }),
     createFigure: () => figureInput(),
+    addSign: () => signInput(),
+    updateSign: () => ({ ...signInput(), ...stale }),
+    markSignSeen: () => ({ day: '2026-11-29', who: 'Tirel' }),
     updateFigure: () => ({ ...figureInput(), ...stale }),
     createAttachment: () => attachmentInput({ subjectId: village.figureId }),
     addAttachmentPart: () => ({ part: 1, seconds: 2 }),

@@ -9,6 +9,7 @@ import { addFigure } from './figure-api.js';
 import { sharingOf, type Circle } from './levelled-entries.js';
 import type { Plant } from './levelled-village.js';
 import { randomFrom } from './seeded-random.js';
+import { addSign } from './sign-api.js';
 import { addVariant } from './variant-api.js';
 
 /** Of figures and files there is one for each value of an axis; entries have all combinations. */
@@ -55,6 +56,25 @@ export async function addLevelledFigures(
   }
   await setRoles(api, giver, ['elder']);
   return figures;
+}
+
+/** Signs of the village's list are the officers' to write down, as figures are. */
+export async function addLevelledSigns(
+  api: TestApi,
+  circle: Circle,
+  combinations: readonly Combination[],
+  plant: Plant,
+): Promise<string[]> {
+  const { giver } = circle;
+  const ids: string[] = [];
+  await setRoles(api, giver, ['elder', 'officer']);
+  for (const combination of combinations) {
+    const word = plant('sign', combination);
+    const said = { name: word, look: word, where: word, sharingLevel: combination.level };
+    ids.push((await addSign(giver, { ...said, sharing: sharingOf(combination, circle) })).id);
+  }
+  await setRoles(api, giver, ['elder']);
+  return ids;
 }
 
 /** Another keeper's timing beside an entry. `seen` is the narrower of its own level and of the entry's. */

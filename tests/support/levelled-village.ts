@@ -21,6 +21,7 @@ import { openLevelledPeople, type LevelledPeople } from './levelled-people.js';
 import {
   addLevelledFigures,
   addLevelledFiles,
+  addLevelledSigns,
   addLevelledVariant,
   plainAt,
   VILLAGE_THINGS,
@@ -86,6 +87,7 @@ export async function furnishLevels(
   const calendar = await beginCalendar(village);
 
   const figures = await addLevelledFigures(api, circle, [...LEVELS.map(plainAt), ...VILLAGE_THINGS], plant);
+  const signIds = await addLevelledSigns(api, circle, LEVELS.map(plainAt), plant);
   const figureAt = (level: Combination['level']) => expectFound(figures, plainAt(level));
   const entries: LevelledEntry[] = [];
   const give = async (combination: Combination, led: Partial<EntryInput> | null = null) => {
@@ -187,6 +189,8 @@ export async function furnishLevels(
       entryId: looked.map(({ id }) => id),
       number: [...numbers, 'draft'],
       figureId: figures.map(({ id }) => id),
+      signId: signIds,
+      seenId: [randomUUID()],
       markerKey: askedFigures.map(({ markerKey }) => markerKey),
       itemType: [...SHARED_ITEM_TYPES],
       itemId: [...looked, ...figures].map(({ id }) => id),

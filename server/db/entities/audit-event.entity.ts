@@ -41,7 +41,8 @@ export class AuditEventEntity {
     | 'figure'
     | 'group'
     | 'note'
-    | 'attachment';
+    | 'attachment'
+    | 'sign';
 
   @Column({ name: 'subject_id', type: 'uuid', nullable: true })
   subjectId!: string | null;

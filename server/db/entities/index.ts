@@ -33,6 +33,8 @@ import { NoteEntity } from './note.entity.js';
 import { EntryVariantEntity } from './entry-variant.entity.js';
 import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
+import { SignEntity } from './sign.entity.js';
+import { SignSightingEntity } from './sign-sighting.entity.js';
 import { ActualDateEntity } from './actual-date.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
 
@@ -46,6 +48,8 @@ export const ENTITIES = [
   MembershipEntity,
   PlaceEntity,
   FigureEntity,
+  SignEntity,
+  SignSightingEntity,
   CalendarEntity,
   EntryEntity,
   DeathEntity,

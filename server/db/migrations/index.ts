@@ -20,6 +20,7 @@ import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
+import { Signs1799000000000 } from './1799000000000-signs.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -45,4 +46,5 @@ export const MIGRATIONS = [
   Rollovers1798800000000,
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
+  Signs1799000000000,
 ];

@@ -5,6 +5,7 @@ import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { SignEntity } from '../../db/entities/sign.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
@@ -46,6 +47,8 @@ const NAMES: Readonly<
         names[0]?.name ?? '',
       ]),
     ),
+  sign: async (manager, ids) =>
+    new Map((await manager.findBy(SignEntity, { id: In(ids) })).map(({ id, words }) => [id, words.name])),
   entry: async (manager, ids) =>
     new Map(
       (await manager.findBy(EntryEntity, { id: In(ids) })).map(({ id, content }) => [
@@ -96,7 +99,7 @@ export async function subjectNames(
 }
 
 /** Subjects that have a level of their own. */
-const LEVELLED = ['entry', 'figure', 'note', 'attachment'] as const;
+const LEVELLED = ['entry', 'figure', 'note', 'attachment', 'sign'] as const;
 
 /** How each row's subject appears to a person: what leaves no trace for them leaves none in the records either. */
 export async function subjectAppearances(

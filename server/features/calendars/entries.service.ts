@@ -21,11 +21,13 @@ import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-
 import { withKeptGiver, withNaming } from '../../policy/giver-naming.js';
 import { isKept } from '../../policy/policy.js';
 import { copySharing, sharedById } from '../../policy/sharing.repository.js';
+import { withTellableSigns } from '../../policy/sign-sight.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { actualDaysOf } from '../actual-days/known-days.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
+import { expectTellableSigns, withListedSigns } from '../signs/entry-signs.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
@@ -52,12 +54,16 @@ export class EntriesService {
     return list;
   }
 
-  async add(actor: Actor, calendarId: string, content: EntryInput): Promise<Entry> {
+  async add(actor: Actor, calendarId: string, input: EntryInput): Promise<Entry> {
     return this.change(calendarId, async (manager, calendar) => {
-      await expectKnownMarker(manager, await this.viewer(manager, actor), content, 'lead');
+      const viewer = await this.viewer(manager, actor);
+      await expectKnownMarker(manager, viewer, input, 'lead');
+      const writing = { entryId: null, stored: null, written: input, prefix: '' };
+      const content = await withListedSigns(manager, viewer, writing);
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
       await shareNewEntry(manager, actor, id, content);
+      await expectTellableSigns(manager, id, { ...writing, written: content });
       await this.expectAnchored(manager, actor, calendar, id, 'lead');
       await writeOrder(manager, [...entries.map((entry) => entry.id), id]);
       await this.record(manager, actor, calendarId, 'entry-added', id);
@@ -73,7 +79,10 @@ export class EntriesService {
         throw stale(await this.one(manager, actor, calendar, entryId), input);
       const viewer = await this.viewer(manager, actor);
       const shared = (await sharedById(manager, 'entry', [entryId])).get(entryId);
-      const content = withKeptGiver(viewer, shared, row.content, input.content);
+      const stored = row.content;
+      const written = withKeptGiver(viewer, shared, stored, input.content);
+      const writing = { entryId, stored, written, prefix: 'content.' };
+      const content = await withListedSigns(manager, viewer, writing);
       const fields = changedFields(row.content, content);
       if (fields.includes('lead')) {
         await expectKnownMarker(manager, viewer, content, 'content.lead');
@@ -88,6 +97,7 @@ export class EntriesService {
           { content, updatedBy: actor.person.id, updatedAt: this.clock.now() },
         );
         await this.expectAnchored(manager, actor, calendar, entryId, 'content.lead');
+        await expectTellableSigns(manager, entryId, { ...writing, written: content });
       }
       return this.one(manager, actor, calendar, entryId);
     });
@@ -249,6 +259,10 @@ export class EntriesService {
       manager,
       seen.map(({ row }) => row.id),
     );
+    const told = await withTellableSigns(
+      manager,
+      seen.map(({ row }) => ({ entryId: row.id, content: row.content })),
+    );
     const items = seen.map(({ row, dates }, position) => {
       const warnings = colliding.has(row.id)
         ? inOrder(new Set([...dates.warnings, 'windows-overlap' as const]))
@@ -256,7 +270,7 @@ export class EntriesService {
       const updatedByName = names.get(row.updatedBy) ?? '';
       const shared = sight.sharedOf(row.id);
       const mine = mayWrite(viewer, shared);
-      const content = withNaming(viewer, shared, row.content);
+      const content = withNaming(viewer, shared, told[position]?.content ?? row.content);
       const facts = { row, content, dates: { ...dates, warnings }, updatedByName, position, mine };
       return toEntry({ ...facts, actual: actual.get(row.id) ?? null });
     });

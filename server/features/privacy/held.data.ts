@@ -47,6 +47,8 @@ export const HELD: Readonly<Record<string, Held>> = {
   rollover: row('knowledge', ['rolled_by'], ['calendar_id', 'rolled_at']),
   rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
+  sign: row('knowledge', ['updated_by'], ['id', 'updated_at']),
+  sign_sighting: row('knowledge', ['marked_by'], 'all'),
   item_sharing: row('knowledge', ['giver_id'], 'all'),
   version_entry: row('knowledge', [], []),
   version_variant: row('knowledge', [], []),

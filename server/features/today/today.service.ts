@@ -1,7 +1,7 @@
 import { lateSaid, signsSaid } from '#shared/calendar/said-words.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import { boardDayOf } from '#shared/calendar/board-days.js';
-import type { Calendar } from '#shared/contracts/calendars.js';
+import type { Calendar, EntryInput } from '#shared/contracts/calendars.js';
 import type { Place } from '#shared/contracts/places.js';
 import type { OpenWindow, Today } from '#shared/contracts/today.js';
 import { civilDateFromIso } from '#shared/kernel/iso-date.js';
@@ -106,7 +106,7 @@ function choosePlace(
   return [...places].sort((a, b) => rank(a) - rank(b))[0] ?? null;
 }
 
-function openWindows({ calendarId, entries }: CalendarContent, date: string): OpenWindow[] {
+function openWindows({ calendarId, header, entries }: CalendarContent, date: string): OpenWindow[] {
   return entries.flatMap((entry) => {
     const { entryId, content } = entry;
     const { window } = boardOf(entry);
@@ -122,9 +122,19 @@ function openWindows({ calendarId, entries }: CalendarContent, date: string): Op
         ifLate: lateSaid(content),
         otherSigns: signsSaid(content),
         hasLastDate: content.hasLastDate,
+        year: header.year,
+        ...awaitedOf(content),
       },
     ];
   });
+}
+
+/** The signs for which people wait, where any is named. */
+function awaitedOf({ record }: EntryInput): Pick<OpenWindow, 'awaits'> {
+  if (record === undefined || record.signs.list.length === 0) return {};
+  const { signs, work } = record;
+  const { leadDays, graceDays } = record.when;
+  return { awaits: { signs, when: { leadDays, graceDays }, work: { stop: work.stop } } };
 }
 
 /** What ends first comes first. */

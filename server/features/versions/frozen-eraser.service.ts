@@ -2,7 +2,7 @@ import type { VariantInput } from '#shared/contracts/variants.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { wasPublished } from '#shared/calendar/version-state.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
-import type { EntityManager } from 'typeorm';
+import { Like, type EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
@@ -10,6 +10,7 @@ import { VersionVariantEntity } from '../../db/entities/version-variant.entity.j
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import type { PublishedTrace } from '../../db/entities/withdrawal.entity.js';
 import { withoutGiver } from '../../policy/giver-naming.js';
+import { keepingShared } from '../../policy/sign-sight.js';
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { frozenEntries } from './versions.repository.js';
 
@@ -37,8 +38,13 @@ export async function eraseFrozenEntry(
     await manager.delete(VersionEntryEntity, { id });
   }
   await manager.delete(AnswerEntity, { entryId });
-  return rows
-    .map(({ calendarVersion }) => calendarVersion)
+  return tracesOf(rows);
+}
+
+/** The published versions in which something stood, each once. */
+function tracesOf(rows: readonly { calendarVersion: CalendarVersionEntity }[]): PublishedTrace[] {
+  const versions = new Map(rows.map(({ calendarVersion }) => [calendarVersion.id, calendarVersion]));
+  return [...versions.values()]
     .filter(({ state }) => wasPublished(state))
     .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
 }
@@ -53,10 +59,7 @@ export async function eraseFrozenVariant(
     relations: { calendarVersion: true },
   });
   await manager.delete(VersionVariantEntity, { variantId });
-  return rows
-    .map(({ calendarVersion }) => calendarVersion)
-    .filter(({ state }) => wasPublished(state))
-    .map(({ calendarId, number, label }) => ({ calendarId, number, label: label ?? '' }));
+  return tracesOf(rows);
 }
 
 /** Variants of an entry, in its draft and wherever they were frozen. */
@@ -87,6 +90,24 @@ export async function takeNameOffFrozenVariant(manager: EntityManager, variantId
       await manager.update(VersionVariantEntity, { id }, { bodyText: nameless, redacted: true });
     }
   }
+}
+
+/** Takes a sign of the village's list out of every version that froze it; those entries' hashes cannot be made again then. */
+export async function eraseFrozenSign(manager: EntityManager, signId: string): Promise<PublishedTrace[]> {
+  const rows = await manager.find(VersionEntryEntity, {
+    where: { bodyText: Like(`%${signId}%`) },
+    relations: { calendarVersion: true },
+  });
+  for (const { id, bodyText } of rows) {
+    const body = JSON.parse(bodyText) as VersionEntryBody;
+    const content = keepingShared(body.content, (one) => one !== signId);
+    await manager.update(
+      VersionEntryEntity,
+      { id },
+      { bodyText: canonicalJson({ ...body, content }), redacted: true },
+    );
+  }
+  return tracesOf(rows);
 }
 
 /** Takes a figure's own name out of every frozen header: what went by it goes by its star's name in the sky. */

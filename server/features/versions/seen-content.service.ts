@@ -7,6 +7,7 @@ import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
 import { anybody, withNaming } from '../../policy/giver-naming.js';
 import { sharedById } from '../../policy/sharing.repository.js';
+import { withTellableSigns } from '../../policy/sign-sight.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { markerKeyOfLead, markerKeysOf, withUsedFigures } from '../calendars/sky-dates.service.js';
 
@@ -26,7 +27,7 @@ export async function seenOfVersion(
   header: VersionHeader,
   entries: readonly VersionEntry[],
 ): Promise<Seen<VersionEntry>> {
-  const seen = await withSeenVariants(manager, viewer, entries);
+  const seen = await withTellableSigns(manager, await withSeenVariants(manager, viewer, entries));
   const sight = await entrySight(manager, viewer, entries.map(thingOf));
   const fallen = wasPublished(version.state) ? await fallenIds(manager, version.id) : new Set<string>();
   return cutDown(
@@ -44,7 +45,7 @@ export async function seenOfDraft(
   header: VersionHeader,
   entries: readonly VersionEntryBody[],
 ): Promise<Seen<VersionEntryBody>> {
-  const seen = await withSeenVariants(manager, viewer, entries);
+  const seen = await withTellableSigns(manager, await withSeenVariants(manager, viewer, entries));
   return cutDown(header, seen, await entrySight(manager, viewer, entries.map(thingOf)), viewer);
 }
 

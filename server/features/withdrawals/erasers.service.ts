@@ -15,10 +15,12 @@ import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.se
 import { eraseConsents } from '../consents/consent-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
 import { eraseNote, eraseNotesOf } from '../notes/note-eraser.service.js';
+import { eraseSign } from '../signs/sign-eraser.service.js';
 import { forgetRolledDays, sameInOtherYears } from '../rollovers/same-things.service.js';
 import {
   eraseFrozenEntry,
   eraseFrozenFigure,
+  eraseFrozenSign,
   eraseFrozenVariant,
   variantIdsOf,
 } from '../versions/frozen-eraser.service.js';
@@ -85,6 +87,10 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
     only('story', async (manager, { itemId }) => {
       await eraseStory(manager, itemId);
       return {};
+    }),
+    only('sign', async (manager, { itemId }) => {
+      await eraseSign(manager, itemId);
+      return { published: await eraseFrozenSign(manager, itemId) };
     }),
     only('attachment', async (manager, { itemId }) => attached(await eraseAttachments(manager, [itemId]))),
     async (manager, { itemType, itemId }) => {

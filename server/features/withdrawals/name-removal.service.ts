@@ -71,6 +71,7 @@ const TAKE_OFF: Readonly<Record<SharedItemType, (manager: EntityManager, itemId:
     story: takeNamesOffTellings,
     attachment: takeNameOffSpeaker,
     note: nothing,
+    sign: nothing,
   };
 
 async function namesOn(manager: EntityManager, { itemType, itemId }: Thing): Promise<Set<string>> {
@@ -93,7 +94,7 @@ async function hangingOf(
   { itemType, itemId }: Thing,
   giver: Giver,
 ): Promise<Thing[]> {
-  if (itemType === 'attachment' || itemType === 'variant') return [];
+  if (itemType === 'attachment' || itemType === 'variant' || itemType === 'sign') return [];
   const subjectType = itemType === 'story' ? 'figure' : itemType;
   const recordings = await manager.findBy(AttachmentEntity, { subjectType, subjectId: itemId });
   const variantIds = itemType === 'entry' ? await variantIdsOf(manager, itemId) : [];

@@ -5,6 +5,7 @@ export const texts = {
     people: 'People',
     places: 'Places',
     figures: 'Figures',
+    signs: 'Signs',
     groups: 'Groups',
     asking: 'To ask',
     consents: 'Consents',

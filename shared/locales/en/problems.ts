@@ -68,6 +68,11 @@ export const texts = {
     'not-yourself': 'Nobody makes themselves an elder. Ask another steward or the elders.',
     'figure-in-use':
       'Entries of a draft go by this figure. Let them go by something else first, then take it out.',
+    'sign-in-use': 'Entries of a draft wait for this sign. Take it out of them first, then out of the list.',
+    'sign-is-there': 'This sign stands in the list already.',
+    'too-many-signs': 'A village keeps at most 200 signs. Take one out that nobody needs.',
+    'seen-often-enough': 'This sign is marked as seen often enough. Take one of yours back first.',
+    'not-the-marker': 'Only who marked it can take it back.',
     'figure-is-there': 'This figure stands in the list already.',
     'too-many-figures': 'A village keeps at most 100 figures. Take one out that nobody needs.',
     'something-stands':
@@ -140,6 +145,11 @@ export const texts = {
       'These entries would wait for each other in a circle. Let one of them go by something else.',
     'anchor-kept':
       'Fewer people see that entry than this one: its days would tell of it. Choose another, or keep this one in the same circle.',
+    'unknown-sign': 'This sign is not in the village’s list any more. Choose another one.',
+    'sign-kept':
+      'Fewer people see that sign than this entry, which would tell of it. Choose another, or write one of its own.',
+    'still-to-come': 'This day is still to come. Write the day on which it was seen.',
+    'too-long-ago': 'This was too long ago to say anything about this year.',
     'before-first': 'The last day lies before the first.',
     'not-of-this-year': 'This day is too far from the year of the calendar.',
     'days-range': 'This is more days than such a count can have.',

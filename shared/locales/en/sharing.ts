@@ -116,6 +116,7 @@ export const texts = {
       note: 'A note',
       attachment: 'A recording or a picture',
       variant: 'Another telling',
+      sign: 'A sign of nature',
     },
     unseen: 'What it says is not shown to you; you agree to who may see it.',
     now: 'Now: {{level}}',

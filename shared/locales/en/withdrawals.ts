@@ -8,6 +8,7 @@ export const texts = {
     note: 'A note',
     attachment: 'A recording or a picture',
     variant: 'Another telling',
+    sign: 'A sign of nature',
   },
   lead: 'What was given can always be taken back. No reason is asked for.',
   notYours: 'This is not yours to take back',

@@ -10,7 +10,7 @@ import { TextField } from '#src/ui/field.js';
 import { More } from '#src/ui/fold.js';
 import { useToast } from '#src/ui/toast.js';
 import { useActualDays } from '../api/actual-days.js';
-import { LineField } from './record-parts.js';
+import { LineField } from '#src/ui/said-fields.js';
 
 interface ActualDaysPanelProps {
   calendarId: string;

@@ -2,8 +2,8 @@ import { useTranslation } from 'react-i18next';
 import { PLANNED_DAYS } from '#shared/contracts/entry-lead.js';
 import { SelectField, TextField, TickField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
-import { MonthDayFields } from './month-day-fields.js';
-import { LineField } from './record-parts.js';
+import { MonthDayFields } from '#src/lib/month-day-fields.js';
+import { LineField } from '#src/ui/said-fields.js';
 
 interface AnchorProps {
   form: FormState;

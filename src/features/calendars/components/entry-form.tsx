@@ -1,6 +1,7 @@
 import { useEffect, useId, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useEntryFacts } from '#src/lib/entry-facts.js';
+import { SignsInLine } from '#src/lib/signs-in-line.js';
 import { Button } from '#src/ui/button.js';
 import { Fold } from '#src/ui/fold.js';
 import { classNames } from '#src/ui/class-names.js';
@@ -108,6 +109,11 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             entry={entry}
             all={editor.shown}
             onWay={(way) => goWay(way, form, groups, search)}
+          />
+          <SignsInLine
+            record={entry.content.record}
+            window={entry.dates?.window ?? null}
+            year={editor.calendar.year}
           />
           <GroupFolds form={form} groups={groups} onSearch={search} />
           <RecordNeeds content={entry.content} />

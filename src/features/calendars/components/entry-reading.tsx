@@ -1,6 +1,7 @@
 import { useId } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
+import { SignsInLine } from '#src/lib/signs-in-line.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import type { EntryAnswers } from '../model/elder-requests.js';
 import type { ShownEntry } from '../model/preview-dates.js';
@@ -43,6 +44,11 @@ export function EntryReading({
         />
       )}
       <div className="mt-3 grid gap-3">
+        <SignsInLine
+          record={entry.content.record}
+          window={entry.dates?.window ?? null}
+          year={calendar.year}
+        />
         {GROUPS.filter((group) => groups[group].length > 0).map((group) => (
           <div key={group} className="fact-group">
             <h3 className="text-body text-umber-soft">{t(`form.group.${group}`)}</h3>

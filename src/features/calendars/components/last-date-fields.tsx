@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { TextField, TickField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
-import { MonthDayFields } from './month-day-fields.js';
+import { MonthDayFields } from '#src/lib/month-day-fields.js';
 
 /** The office's last date, or the mark of a watch that nothing shortens. */
 export function LastDateFields({ form }: { form: FormState }) {

@@ -1,14 +1,8 @@
 import { useTranslation } from 'react-i18next';
 import { OPERATIONS, REPEATS } from '#shared/contracts/event-record.js';
 import { SelectField, TextField } from '#src/ui/field.js';
-import {
-  ChoiceField,
-  CountField,
-  LineField,
-  RecordMore,
-  setRecord,
-  type RecordProps,
-} from './record-parts.js';
+import { ChoiceField, CountField, LineField } from '#src/ui/said-fields.js';
+import { RecordMore, setRecord, type RecordProps } from './record-parts.js';
 
 /** Kind of work, variety and land. */
 export function RecordWhat({ form }: RecordProps) {

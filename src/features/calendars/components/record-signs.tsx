@@ -1,29 +1,18 @@
 import { Plus, Trash2 } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import {
-  RECORD_SIGNS_MAX,
-  RECORD_SIGN_TYPES,
-  STILL_SEEN,
-  type RecordSign,
-} from '#shared/contracts/event-record.js';
+import { RECORD_SIGNS_MAX, type RecordSign } from '#shared/contracts/event-record.js';
+import { NEW_SIGN, SignWordFields } from '#src/lib/sign-word-fields.js';
 import { Button } from '#src/ui/button.js';
-import { SelectField, TickField } from '#src/ui/field.js';
-import { SignMarks } from '#src/ui/pictures/sign-marks.js';
+import { SelectField } from '#src/ui/field.js';
+import { CountField } from '#src/ui/said-fields.js';
 import { withoutSign } from '../model/record-signs.js';
-import { MonthDayFields } from './month-day-fields.js';
-import {
-  ChoiceField,
-  CountField,
-  LineField,
-  RecordMore,
-  setRecord,
-  type RecordProps,
-} from './record-parts.js';
+import { SignFromList, SignToList, SignsToChoose } from './listed-signs.js';
+import { RecordMore, setRecord, type RecordProps } from './record-parts.js';
 
-const NEW_SIGN: RecordSign = { type: 'bird', name: '', look: '', where: '', usual: null, stillSeen: null };
-const FIRST_USUAL = { from: { month: 1, day: 1 }, to: { month: 1, day: 31 } };
-
-/** The signs for which people wait: each by itself, how many are needed, and the one without which nothing begins. */
+/**
+ * The signs for which people wait: of the village's list or in the entry's own words, how many are needed, and the one
+ * without which nothing begins.
+ */
 export function RecordSigns({ form }: RecordProps) {
   const { t } = useTranslation('record');
   const { signs } = form.draft.record;
@@ -34,33 +23,27 @@ export function RecordSigns({ form }: RecordProps) {
         <OneSign key={index} form={form} sign={sign} index={index} />
       ))}
       {list.length < RECORD_SIGNS_MAX && (
-        <div>
-          <Button
-            look="quiet"
-            icon={<Plus aria-hidden size={22} />}
-            onClick={() => setRecord(form, 'signs', { list: [...list, NEW_SIGN] })}
-          >
-            {t('signs.add')}
-          </Button>
+        <div className="grid gap-3">
+          <SignsToChoose form={form} />
+          <div>
+            <Button
+              look="quiet"
+              icon={<Plus aria-hidden size={22} />}
+              onClick={() => setRecord(form, 'signs', { list: [...list, NEW_SIGN] })}
+            >
+              {t('signs.add')}
+            </Button>
+          </div>
         </div>
       )}
       {list.length > 0 && (
         <div className="grid gap-4 @min-[34rem]:grid-cols-2">
-          <div>
-            <CountField
-              label={t('signs.needed')}
-              value={needed}
-              problem={form.at('record.signs.needed')}
-              onChange={(count) => setRecord(form, 'signs', { needed: count })}
-            />
-            {needed !== null && (
-              <SignMarks
-                needed={needed}
-                total={list.length}
-                label={t('signs.neededForEars', { count: needed, total: list.length })}
-              />
-            )}
-          </div>
+          <CountField
+            label={t('signs.needed')}
+            value={needed}
+            problem={form.at('record.signs.needed')}
+            onChange={(count) => setRecord(form, 'signs', { needed: count })}
+          />
           <SelectField
             label={t('signs.mustHave')}
             value={mustHave ?? ''}
@@ -100,58 +83,13 @@ function OneSign({ form, sign, index }: OneSignProps) {
   return (
     <fieldset className="grid gap-3 border-s-4 border-hairline ps-4">
       <legend className="field-label">{t('signs.one', { number: index + 1 })}</legend>
-      <div className="grid gap-3 @min-[34rem]:grid-cols-2">
-        <SelectField
-          label={t('signs.type.label')}
-          value={sign.type}
-          onChange={(event) => {
-            const type = RECORD_SIGN_TYPES.find((one) => one === event.currentTarget.value);
-            if (type) set({ type });
-          }}
-        >
-          {RECORD_SIGN_TYPES.map((type) => (
-            <option key={type} value={type}>
-              {t(`signs.type.${type}`)}
-            </option>
-          ))}
-        </SelectField>
-        <LineField
-          label={t('signs.name')}
-          value={sign.name}
-          problem={at('name')}
-          onChange={(name) => {
-            set({ name });
-          }}
-        />
-        <LineField
-          label={t('signs.look')}
-          value={sign.look}
-          problem={at('look')}
-          onChange={(look) => {
-            set({ look });
-          }}
-        />
-        <LineField
-          label={t('signs.where')}
-          value={sign.where}
-          problem={at('where')}
-          onChange={(where) => {
-            set({ where });
-          }}
-        />
-      </div>
-      <UsualDays sign={sign} at={at} set={set} />
+      {sign.sharedId === undefined ? (
+        <SignWordFields sign={sign} at={at} set={set} />
+      ) : (
+        <SignFromList sign={sign} problem={at('sharedId')} />
+      )}
       <div className="flex flex-wrap items-end justify-between gap-3">
-        <ChoiceField
-          label={t('signs.stillSeen.label')}
-          nothing={t('choose')}
-          options={STILL_SEEN}
-          words={(one) => t(`signs.stillSeen.${one}`)}
-          value={sign.stillSeen}
-          onChange={(stillSeen) => {
-            set({ stillSeen });
-          }}
-        />
+        {sign.sharedId === undefined && <SignToList sign={sign} onListed={set} />}
         <Button
           look="quiet"
           icon={<Trash2 aria-hidden size={20} />}
@@ -161,46 +99,5 @@ function OneSign({ form, sign, index }: OneSignProps) {
         </Button>
       </div>
     </fieldset>
-  );
-}
-
-interface UsualDaysProps {
-  sign: RecordSign;
-  at: (field: string) => string | undefined;
-  set: (patch: Partial<RecordSign>) => void;
-}
-
-function UsualDays({ sign: { usual }, at, set }: UsualDaysProps) {
-  const { t } = useTranslation('record');
-  return (
-    <div className="grid gap-3">
-      <TickField
-        label={t('signs.hasUsual')}
-        checked={usual !== null}
-        onChange={(event) => {
-          set({ usual: event.currentTarget.checked ? FIRST_USUAL : null });
-        }}
-      />
-      {usual !== null && (
-        <div className="grid gap-3 @min-[34rem]:grid-cols-2">
-          <MonthDayFields
-            label={t('signs.usualFrom')}
-            value={usual.from}
-            problem={at('usual.from.day')}
-            onChange={(from) => {
-              set({ usual: { ...usual, from } });
-            }}
-          />
-          <MonthDayFields
-            label={t('signs.usualTo')}
-            value={usual.to}
-            problem={at('usual.to.day')}
-            onChange={(to) => {
-              set({ usual: { ...usual, to } });
-            }}
-          />
-        </div>
-      )}
-    </div>
   );
 }

@@ -1,7 +1,8 @@
 import { useTranslation } from 'react-i18next';
 import { BASES, CONFIDENCES, type EventRecord } from '#shared/contracts/event-record.js';
 import { TextField, TickField } from '#src/ui/field.js';
-import { ChoiceField, LineField, setRecord, type RecordProps } from './record-parts.js';
+import { ChoiceField, LineField } from '#src/ui/said-fields.js';
+import { setRecord, type RecordProps } from './record-parts.js';
 
 const CHECKS = ['work', 'safety', 'late'] as const satisfies (keyof EventRecord['checked'])[];
 type CheckOf = (typeof CHECKS)[number];

@@ -1,7 +1,8 @@
 import { useTranslation } from 'react-i18next';
 import { TickField } from '#src/ui/field.js';
-import { MonthDayFields } from './month-day-fields.js';
-import { AreaField, LineField, RecordMore, setRecord, type RecordProps } from './record-parts.js';
+import { MonthDayFields } from '#src/lib/month-day-fields.js';
+import { AreaField, LineField } from '#src/ui/said-fields.js';
+import { RecordMore, setRecord, type RecordProps } from './record-parts.js';
 
 const PEOPLE = ['responsible', 'helpers', 'decides', 'owns'] as const;
 const RULES = ['inputs', 'ifEarly', 'ifLaterStill'] as const;

@@ -10,7 +10,7 @@ import { isByStar, type FormState } from '../model/form-state.js';
 import { AnchorFields, NatureFields, SeenFields } from './anchor-fields.js';
 import { LastDateFields } from './last-date-fields.js';
 import { MarkerFields } from './marker-fields.js';
-import { MonthDayFields } from './month-day-fields.js';
+import { MonthDayFields } from '#src/lib/month-day-fields.js';
 import { OffsetSteppers } from './offset-steppers.js';
 import { SignFields } from './sign-fields.js';
 import { WindowPicture } from './window-picture.js';

@@ -17,6 +17,7 @@ export function VillageTabs() {
       links={[
         { to: paths.villagePlaces(), label: t('tabs.places') },
         { to: paths.villageFigures(), label: t('tabs.figures') },
+        { to: paths.villageSigns(), label: t('tabs.signs') },
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
         { to: paths.villageGroups(), label: t('tabs.groups') },
         ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),

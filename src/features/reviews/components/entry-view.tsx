@@ -6,6 +6,7 @@ import { useSharingWords } from '#src/lib/sharing-words.js';
 import type { VersionEntryBody, VersionHeader } from '#shared/contracts/versions.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { RecordReading } from '#src/lib/record-reading.js';
+import { SignsInLine } from '#src/lib/signs-in-line.js';
 import { VariantList } from '#src/lib/variant-list.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { Care } from '#src/ui/surfaces.js';
@@ -92,6 +93,7 @@ export function EntryView({
       {content.protectiveWatch && <p>{t('watch')}</p>}
       <Part title={t('signs')} text={content.otherSigns} />
       <Part title={t('ifLate')} text={content.ifLate} />
+      <SignsInLine record={content.record} window={window} year={header.year} />
       <RecordReading record={content.record} />
       <Part title={t('crop')} text={content.crop} />
       <Part title={t('notes')} text={content.notes} />

@@ -6,6 +6,7 @@ import { markerName } from '#src/lib/marker-names.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { RingRow } from '#src/ui/pictures/ring-row.js';
 import { WindowKey } from '#src/ui/pictures/lane-key.js';
+import { SignsInLine } from '#src/lib/signs-in-line.js';
 import { Board } from '#src/ui/surfaces.js';
 import { monthRow } from '../model/month-row.js';
 
@@ -55,7 +56,7 @@ export function PegBoard({ today }: { today: Today }) {
         {row.windows.map(({ open }) => (
           <li key={open.entryId} className="flex items-start gap-3">
             <SignIcon sign={open.icon} size={32} className="mt-0.5 shrink-0" />
-            <span>
+            <div>
               {t('today:peg.window', {
                 title: open.titleOfficer,
                 range: words.range(open.window.bestFrom, open.window.bestTo),
@@ -64,7 +65,8 @@ export function PegBoard({ today }: { today: Today }) {
               {open.otherSigns !== '' && (
                 <span className="block text-umber-soft text-small">{open.otherSigns}</span>
               )}
-            </span>
+              <SignsInLine record={open.awaits} window={open.window} year={open.year} />
+            </div>
           </li>
         ))}
       </ul>

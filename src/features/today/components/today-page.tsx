@@ -21,8 +21,15 @@ import { PegBoard } from './peg-board.js';
 import { WaitingBoard } from './waiting-board.js';
 import { WatchCard } from './watch-card.js';
 
+interface TodayPageProps {
+  /** Boards of other features: what waits for a word, what must come down, signs of nature. */
+  asked: ReactNode;
+  urgent?: ReactNode;
+  signs?: ReactNode;
+}
+
 /** What waits for the person, the peg, and what to look for. Who comes in for one task is led on to it. */
-export function TodayPage({ asked, urgent }: { asked: ReactNode; urgent?: ReactNode }) {
+export function TodayPage({ asked, urgent, signs }: TodayPageProps) {
   const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
   const { place, isLoading } = useCurrentPlace();
@@ -51,7 +58,7 @@ export function TodayPage({ asked, urgent }: { asked: ReactNode; urgent?: ReactN
         <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
       )}
       {urgent}
-      {data && <TodayBoards data={data} asked={asked} />}
+      {data && <TodayBoards data={data} asked={asked} signs={signs} />}
     </Page>
   );
 }
@@ -62,7 +69,7 @@ function useHasJustCome(): boolean {
   return location.key === 'default' || hasArrived(location.state);
 }
 
-function TodayBoards({ data, asked }: { data: Today; asked: ReactNode }) {
+function TodayBoards({ data, asked, signs }: { data: Today; asked: ReactNode; signs: ReactNode }) {
   const { t } = useTranslation('today');
   const { is } = useRoles();
   const { place } = useCurrentPlace();
@@ -90,6 +97,7 @@ function TodayBoards({ data, asked }: { data: Today; asked: ReactNode }) {
             </div>
             <div className="grid content-start gap-4">
               <PegBoard today={data} />
+              {signs}
               {watch}
             </div>
           </>
@@ -97,6 +105,7 @@ function TodayBoards({ data, asked }: { data: Today; asked: ReactNode }) {
           <>
             <div className="grid content-start gap-4">
               <PegBoard today={data} />
+              {signs}
               {watch}
             </div>
             <div className="grid content-start gap-4">

@@ -7,6 +7,7 @@ import { BoardLine } from '#src/lib/board-line.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
+import { SignsInLine } from '#src/lib/signs-in-line.js';
 import { VariantList } from '#src/lib/variant-list.js';
 import { KeptLine } from '#src/lib/kept-line.js';
 import { KeptChip } from '#src/lib/level-chip.js';
@@ -86,6 +87,7 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
               .map(({ dayNumber }) => dayNumber)}
           />
         )}
+        <SignsInLine record={content.record} window={board ?? null} year={year} />
         <BesideIt entry={entry} year={year} markers={markers} />
         <EntryRest entry={entry} year={year} markers={markers} />
         {about?.(entry)}

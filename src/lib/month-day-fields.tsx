@@ -1,5 +1,5 @@
 import type { MonthDay } from '#shared/contracts/common.js';
-import { useDateWords } from '#src/lib/date-words.js';
+import { useDateWords } from './date-words.js';
 import { MonthDaySelect } from '#src/ui/month-day-select.js';
 
 interface MonthDayFieldsProps {
