@@ -72,8 +72,8 @@ export function signsIn<S extends { sharedId?: string | undefined }>(
  * Without some signs of the list. The one that must be there stays the same, and no more are needed than are left.
  * @param stays whether the sign at this place stays
  */
-export function keepingSigns<S extends { sharedId?: string | undefined }, A extends AwaitedSigns<S>>(
-  signs: A & { list: readonly S[] },
+export function keepingSigns<S extends { sharedId?: string | undefined }>(
+  signs: AwaitedSigns<S>,
   stays: (sign: S, place: number) => boolean,
 ): { list: S[]; needed: number | null; mustHave: number | null } {
   const places = signs.list.flatMap((sign, place) => (stays(sign, place) ? [place] : []));
