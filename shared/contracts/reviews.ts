@@ -111,14 +111,14 @@ export type Outcome = z.infer<typeof outcome>;
 
 /** What somebody who keeps an entry says to it, for themselves. */
 export const ownAnswerInput = z
-  .strictObject({ answer: answerWord, note: text(1000) })
-  .superRefine(({ answer, note }, context) => {
-    if (answer === 'change-this' && note.length === 0) {
+  .strictObject({ answer: answerWord, note: text(1000), recordingId: id.nullable().optional() })
+  .superRefine(({ answer, note, recordingId }, context) => {
+    if (answer === 'change-this' && note.length === 0 && !recordingId) {
       context.addIssue({ code: 'custom', path: ['note'], message: 'say-what-to-change' });
     }
   });
 export type OwnAnswerInput = z.infer<typeof ownAnswerInput>;
-export const ownAnswer = z.strictObject({ answer: answerWord, note: z.string() });
+export const ownAnswer = answer.pick({ answer: true, note: true, letStand: true, spoken: true });
 export type OwnAnswer = z.infer<typeof ownAnswer>;
 
 /** The entries of a submission that the person keeps with others, and nothing else of it. */
@@ -202,6 +202,15 @@ export const reviewsEndpoints = {
     access: member('calendar', ...ROLES),
     params: answerParams,
     body: ownAnswerInput,
+    response: ownAnswer,
+  }),
+  letOwnStand: defineEndpoint({
+    id: 'letOwnDifferenceStand',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/versions/:number/own-entries/:entryId/answer/stand',
+    summary: 'Whoever keeps an entry and asked for a change lets the difference stand beside it',
+    access: member('calendar', ...ROLES),
+    params: answerParams,
     response: ownAnswer,
   }),
   takeBackOwnAnswer: defineEndpoint({

@@ -18,6 +18,8 @@ import {
   versionPath,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addRecording } from '#tests/support/attachment-api.js';
+import { noteInput } from '#tests/support/notes-api.js';
 import { addGroup, details, sharingPath } from '#tests/support/sharing-api.js';
 
 let api: TestApi;
@@ -91,10 +93,53 @@ describe('whoever keeps an entry', () => {
     await answer(observer, { answer: 'change-this' }).expect(422);
     await answer(observer, { answer: 'change-this', note: 'A day later' }).expect(200);
     await answer(observer, { answer: 'agree', note: 'So it was told' }).expect(200);
-    expect(await ownAnswer(observer)).toEqual({ answer: 'agree', note: 'So it was told' });
+    expect(await ownAnswer(observer)).toMatchObject({ answer: 'agree', note: 'So it was told' });
     await observer.delete(answerPath()).expect(204);
     expect(await ownAnswer(observer)).toBeNull();
     expect(reasonOf(await observer.delete(answerPath()))).toBe('404 not-found');
+  });
+
+  it('may say by voice what should change: their own recording about this entry, and no other', async () => {
+    const spoken = await addRecording(observer, kept.id, {
+      ...{ subjectType: 'entry', sharingLevel: 'group', sharing: details({ groupId: group.id }) },
+    });
+    const byVoice = { answer: 'change-this', note: '', recordingId: spoken.id };
+    expect((await observer.put(answerPath(), byVoice).expect(200)).body).toMatchObject({
+      spoken: { state: 'kept', attachmentId: spoken.id },
+    });
+    expect((await village.steward.put(answerPath(), byVoice)).status).toBe(422);
+    await village.steward.get(`/api/attachments/${spoken.id}`).expect(200);
+    await staff.get(`/api/attachments/${spoken.id}`).expect(404);
+    const { items } = (await village.elder.get(`${versionPath(version)}/answers`).expect(200)).body as {
+      items: Answer[];
+    };
+    expect(items).toMatchObject([{ note: '', spoken: { attachmentId: spoken.id } }]);
+  });
+
+  it('may let their difference stand: then the entry is agreed with a difference', async () => {
+    expect(reasonOf(await observer.post(`${answerPath()}/stand`))).toBe('409 no-change-asked');
+    await answer(village.steward).expect(200);
+    await answer(observer, { answer: 'change-this', note: 'A day later' }).expect(200);
+    expect(await idsOf(observer, await publish(village, version))).not.toContain(kept.id);
+    const second = await submit(village.officer, calendar.id);
+    expect((await observer.post(`${answerPath(kept.id, second)}/stand`).expect(200)).body).toMatchObject({
+      answer: 'change-this',
+      letStand: true,
+    });
+    expect(await idsOf(observer, await publish(village, second))).toContain(kept.id);
+  });
+
+  it('reads and pins notes beside it, which nobody else sees', async () => {
+    const path = `/api/communities/${observer.communityId}/notes`;
+    const subject = { subjectType: 'entry', subjectId: kept.id } as const;
+    const own = (await ownItems(observer))[0]?.entry;
+    await observer.post(path, noteInput({ ...subject, text: 'With two lamps' })).expect(201);
+    expect(own?.entryId).toBe(kept.id);
+    const query = `${path}?subjectType=entry&subjectId=${kept.id}`;
+    const read = async (client: Client) =>
+      ((await client.get(query)).body as { items?: { text: string }[] }).items?.map(({ text }) => text);
+    expect(await read(village.steward)).toEqual(['With two lamps']);
+    expect((await village.officer.get(query)).status).toBe(404);
   });
 
   it('brings it into the published version with their yes, and keeps it out with their no', async () => {

@@ -84,8 +84,8 @@ test('an officer types in what was marked on paper, with its picture', async ({ 
   await expectNoSidewaysScroll(page);
   await page.getByLabel('Day of the meeting').fill('2027-03-01');
   await page.getByLabel('Who was there and saw it').fill('Tirel');
-  const box = page.getByLabel('Elder A-3: answer').last();
-  await box.selectOption('Change this');
+  const row = page.getByRole('group', { name: 'Elder A-3: answer' }).last();
+  await row.getByRole('button', { name: 'Change this' }).click();
   await page.getByRole('button', { name: 'Keep what stands on the paper' }).click();
   await expect(page.getByText('Choose the picture of the paper.')).toBeVisible();
   await expect(page.getByText('Say what should be different: write it, or speak it.')).toBeVisible();

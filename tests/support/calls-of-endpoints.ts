@@ -43,7 +43,7 @@ export interface Village {
   reviewedNumber: number;
 }
 
-const OF_ITS_PEOPLE = new Set(['putOwnAnswer', 'takeBackOwnAnswer']);
+const OF_ITS_PEOPLE = new Set(['putOwnAnswer', 'takeBackOwnAnswer', 'letOwnDifferenceStand']);
 
 export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Record<string, string> {
   const reviewed = new Set([

@@ -1,10 +1,11 @@
 import type { AttachmentSubject, AttachmentSubjectType } from '#shared/contracts/attachments.js';
 import { resolveMarker } from '#shared/sky/index.js';
-import { IsNull, type EntityManager } from 'typeorm';
+import { In, IsNull, type EntityManager } from 'typeorm';
 import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { FigureEntity } from '../../db/entities/figure.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import { seesDrafts } from '../../http/actor.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { maySee } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
@@ -16,21 +17,36 @@ import { readsNote } from '../notes/note-access.service.js';
 
 type Look = (manager: EntityManager, viewer: Viewer, id: string) => Promise<boolean>;
 
-/** Drafts are for those who see drafts; what stands in a published version is for everybody, as far as its level goes. */
+/**
+ * Drafts are for those who see drafts, what is in review for those who keep it, too; what stands in a published version
+ * is for everybody, as far as its level goes.
+ */
 const looksAtEntry: Look = async (manager, viewer, id) => {
-  const ofVillage = { communityId: viewer.communityId };
-  const entry = await manager.findOneBy(EntryEntity, { id, calendar: ofVillage });
+  const calendar = { communityId: viewer.communityId };
+  const entry = await manager.findOneBy(EntryEntity, { id, calendar });
   if (entry === null) return false;
-  const isThere =
-    (seesDrafts(viewer) && entry.deletedAt === null) ||
-    (await manager.existsBy(VersionEntryEntity, {
-      entryId: id,
-      calendarVersion: { state: 'published', calendar: ofVillage },
-    }));
-  if (!isThere) return false;
   const thing = { entryId: id, markerKey: markerKeyOfLead(entry.content.lead) };
-  return (await entrySight(manager, viewer, [thing])).appearance(thing) === 'full';
+  const sight = await entrySight(manager, viewer, [thing]);
+  if (sight.appearance(thing) !== 'full') return false;
+  if (seesDrafts(viewer) && entry.deletedAt === null) return true;
+  const states = sight.isOfItsPeople(thing) ? (['published', 'in-review'] as const) : ['published' as const];
+  const calendarVersion = { state: In(states), calendar };
+  return manager.existsBy(VersionEntryEntity, { entryId: id, calendarVersion });
 };
+
+/** Whether the viewer is of the people who keep an entry that they may see; nothing else is kept by some. */
+export async function keepsSubject(
+  manager: EntityManager,
+  viewer: Viewer,
+  { subjectType, subjectId }: AttachmentSubject,
+): Promise<boolean> {
+  const calendar = { communityId: viewer.communityId };
+  const entry =
+    subjectType === 'entry' ? await manager.findOneBy(EntryEntity, { id: subjectId, calendar }) : null;
+  if (entry === null) return false;
+  const thing = { entryId: entry.id, markerKey: markerKeyOfLead(entry.content.lead) };
+  return (await entrySight(manager, viewer, [thing])).isOfItsPeople(thing);
+}
 
 /** Whether each kind of thing is there, in the viewer's village, for the viewer to see. */
 const LOOKS: Readonly<Record<AttachmentSubjectType, Look>> = {
@@ -67,8 +83,4 @@ export async function maySeeSubject(
   { subjectType, subjectId }: AttachmentSubject,
 ): Promise<boolean> {
   return LOOKS[subjectType](manager, viewer, subjectId);
-}
-
-function seesDrafts({ roles }: Viewer): boolean {
-  return roles.includes('officer') || roles.includes('elder') || roles.includes('steward');
 }

@@ -11,7 +11,7 @@ import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { AttachmentPartEntity } from '../../db/entities/attachment-part.entity.js';
 import { isDuplicate } from '../../db/duplicate.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import type { Actor } from '../../http/actor.js';
+import { seesDrafts, type Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { personNames } from '../people/person-names.service.js';
@@ -28,7 +28,7 @@ import {
   type KeptFile,
   type KeptPicture,
 } from './attachment-files.service.js';
-import { maySeeSubject } from './attachment-subjects.repository.js';
+import { keepsSubject, maySeeSubject } from './attachment-subjects.repository.js';
 import { toAttachment } from './attachments.mapper.js';
 import {
   attachmentsOf,
@@ -67,7 +67,10 @@ export class AttachmentsService {
   /** A picture, or a recording that begins with its spoken consent. Sent again, it is the one that is there. */
   async create(actor: Actor, input: AttachmentInput, file: IncomingFile): Promise<Attachment> {
     const { manager } = this.dataSource;
-    if (!(await maySeeSubject(manager, await this.viewer(actor), input))) throw notFound();
+    const viewer = await this.viewer(actor);
+    if (!(await maySeeSubject(manager, viewer, input))) throw notFound();
+    if (!seesDrafts(viewer) && !(await keepsSubject(manager, viewer, input)))
+      throw conflict('not-kept-by-you');
     const before = await sentBefore(manager, actor, input.clientId);
     if (before !== null) return this.describeOwn(actor, before);
     await expectKnownPeople(manager, actor, input.sharing, input.giverId, '');

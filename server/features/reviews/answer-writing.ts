@@ -85,9 +85,9 @@ export function expectNotOwn(before: AnswerEntity | null): void {
   if (before?.recordedBy === null) throw conflict('own-answer-stands');
 }
 
-/** Only what this elder gave about this very entry, whole and not taken back, speaks for them. */
-async function expectSpoken(
-  { manager, entry }: Asked,
+/** Only what this person gave about this very entry, whole and not taken back, speaks for them. */
+export async function expectSpoken(
+  { manager, entry }: Pick<Asked, 'manager'> & { entry: { entryId: string } },
   communityId: string,
   elderId: string,
   recordingId: string,

@@ -16,6 +16,8 @@ import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { bodyOf } from '../versions/frozen-content.service.js';
 import { ownEntriesOf, type OwnEntries as Kept } from '../versions/own-entries.service.js';
+import { evidenceOf } from './answer-evidence.js';
+import { expectSpoken } from './answer-writing.js';
 import { toOwnAnswer } from './reviews.mapper.js';
 
 /** How far somebody is with the entries of a submission that they keep with others. */
@@ -50,6 +52,7 @@ export class OwnAnswersService {
     const ids = entries.map(({ entryId }) => entryId);
     await recordKeptReads(manager, viewer, this.clock.now(), 'entry', ids);
     const given = await ownAnswers(manager, actor.person.id, entries);
+    const evidence = await evidenceOf(manager, viewer, [...given.values()]);
     return {
       year,
       placeName: place.name,
@@ -58,7 +61,10 @@ export class OwnAnswersService {
       markers: kept === null ? [] : kept.header.markers,
       items: entries.map((entry) => {
         const answer = given.get(entry.entryId);
-        return { entry: bodyOf(entry), answer: answer === undefined ? null : toOwnAnswer(answer) };
+        return {
+          entry: bodyOf(entry),
+          answer: answer === undefined ? null : toOwnAnswer(answer, evidence(answer)),
+        };
       }),
     };
   }
@@ -68,9 +74,12 @@ export class OwnAnswersService {
     calendarId: string,
     number: number,
     entryId: string,
-    { answer, note }: OwnAnswerInput,
+    { answer, note, recordingId = null }: OwnAnswerInput,
   ): Promise<OwnAnswer> {
     return this.inReview(actor, calendarId, number, entryId, async (manager, entry, before) => {
+      if (recordingId !== null) {
+        await expectSpoken({ manager, entry: { entryId } }, actor.communityId, actor.person.id, recordingId);
+      }
       const row = manager.create(AnswerEntity, {
         id: before?.id ?? randomUUID(),
         ...{ calendarId, entryId, entryHash: entry.hash, elderId: actor.person.id },
@@ -80,7 +89,7 @@ export class OwnAnswersService {
           letStand: false,
           recordedBy: null,
           witness: null,
-          recordingId: null,
+          recordingId,
           proof: null,
           proofId: null,
         },
@@ -89,7 +98,20 @@ export class OwnAnswersService {
       });
       await manager.save(AnswerEntity, row, { reload: false });
       await this.record(manager, actor, 'answered', entryId, { calendarId, number, answer });
-      return toOwnAnswer(row);
+      return this.describe(manager, actor, row);
+    });
+  }
+
+  /** As for elders: it takes nothing back, it only stops being in the way. */
+  async letStand(actor: Actor, calendarId: string, number: number, entryId: string): Promise<OwnAnswer> {
+    return this.inReview(actor, calendarId, number, entryId, async (manager, _entry, row) => {
+      if (row?.answer !== 'change-this') throw conflict('no-change-asked');
+      if (!row.letStand) {
+        row.letStand = true;
+        await manager.update(AnswerEntity, { id: row.id }, { letStand: true });
+        await this.record(manager, actor, 'difference-let-stand', entryId, { calendarId, number });
+      }
+      return this.describe(manager, actor, row);
     });
   }
 
@@ -137,6 +159,11 @@ export class OwnAnswersService {
       if (version.state !== 'in-review') throw conflict('not-in-review');
       return work(manager, entry, (await ownAnswers(manager, actor.person.id, [entry])).get(entryId));
     });
+  }
+
+  private async describe(manager: EntityManager, actor: Actor, row: AnswerEntity): Promise<OwnAnswer> {
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    return toOwnAnswer(row, (await evidenceOf(manager, viewer, [row]))(row));
   }
 
   private async keptIn(manager: EntityManager, actor: Actor, version: CalendarVersionEntity): Promise<Kept> {

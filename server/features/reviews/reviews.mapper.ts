@@ -25,6 +25,9 @@ export function toAnswer(
   };
 }
 
-export function toOwnAnswer({ answer, note }: AnswerEntity): OwnAnswer {
-  return { answer, note };
+export function toOwnAnswer(
+  { answer, note, letStand }: AnswerEntity,
+  { spoken }: Pick<Evidence, 'spoken'>,
+): OwnAnswer {
+  return { answer, note, letStand, spoken };
 }

@@ -38,6 +38,9 @@ export function reviewsRoutes(
   mount.forMember(reviewsEndpoints.putOwnAnswer, ({ params, body }, actor) =>
     own.put(actor, params.calendarId, Number(params.number), params.entryId, body),
   );
+  mount.forMember(reviewsEndpoints.letOwnStand, ({ params }, actor) =>
+    own.letStand(actor, params.calendarId, Number(params.number), params.entryId),
+  );
   mount.forMember(reviewsEndpoints.takeBackOwnAnswer, async ({ params }, actor) => {
     await own.takeBack(actor, params.calendarId, Number(params.number), params.entryId);
     return undefined;

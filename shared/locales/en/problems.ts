@@ -99,6 +99,8 @@ export const texts = {
     'removed-for-good': 'Something was removed for good, as they chose. That cannot be undone.',
     'nothing-written-out':
       'Nothing was written out from this recording yet. Write it out first, or take all of it back.',
+    'not-kept-by-you':
+      'You can add recordings and pictures to what you keep with others. For everything else, ask the officer or an elder.',
     'not-yours': 'Only whoever added this can change or remove it.',
     'consent-there': 'This person has been asked about it already. Write the new answer down there.',
     'nothing-to-withdraw': 'Nothing is agreed here that could be taken back.',

@@ -23,6 +23,14 @@ export function usePutOwnAnswer(ref: VersionRef) {
   });
 }
 
+export function useLetOwnStand(ref: VersionRef) {
+  return useMutation({
+    mutationFn: (entryId: string) =>
+      callApi(reviewsEndpoints.letOwnStand, { params: { ...paramsOf(ref), entryId } }),
+    onSettled: useLookAgain(ref),
+  });
+}
+
 export function useTakeBackOwnAnswer(ref: VersionRef) {
   return useMutation({
     mutationFn: (entryId: string) =>

@@ -8,6 +8,7 @@ import { useKeptDraft } from '#src/lib/kept-draft.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
+import { More } from '#src/ui/fold.js';
 import { FieldFrame, TextField } from '#src/ui/field.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
@@ -80,6 +81,33 @@ export function MeetingForm({ version, elders, given }: MeetingFormProps) {
     }
   };
 
+  const numbered = version.entries.map((entry, index) => ({ ...entry, number: index + 1 }));
+  const isOpen = ({ entryId }: (typeof numbered)[number]) =>
+    elders.some(({ elderId }) => !own.has(markKey(elderId, entryId)));
+  const open = numbered.filter(isOpen);
+  const answered = numbered.filter((entry) => !isOpen(entry));
+  const rowsOf = ({ entryId, content, number }: (typeof numbered)[number]) => (
+    <Board key={entryId} title={`${number}. ${content.titleOfficer}`}>
+      <div className="paper-marks">
+        {elders.map(({ elderId, elderName }) => {
+          const key = markKey(elderId, entryId);
+          return (
+            <PaperMark
+              key={key}
+              name={elderName}
+              own={own.get(key) ?? null}
+              value={paper.marks[key] ?? { answer: '', note: '' }}
+              problem={problems[key]}
+              onChange={(mark) => {
+                change({ marks: { ...paper.marks, [key]: mark } });
+              }}
+            />
+          );
+        })}
+      </div>
+    </Board>
+  );
+
   return (
     <form
       className="grid gap-4"
@@ -130,27 +158,12 @@ export function MeetingForm({ version, elders, given }: MeetingFormProps) {
           </FieldFrame>
         </div>
       </Board>
-      {version.entries.map(({ entryId, content }, index) => (
-        <Board key={entryId} title={`${index + 1}. ${content.titleOfficer}`}>
-          <div className="paper-marks">
-            {elders.map(({ elderId, elderName }) => {
-              const key = markKey(elderId, entryId);
-              return (
-                <PaperMark
-                  key={key}
-                  name={elderName}
-                  own={own.get(key) ?? null}
-                  value={paper.marks[key] ?? { answer: '', note: '' }}
-                  problem={problems[key]}
-                  onChange={(mark) => {
-                    change({ marks: { ...paper.marks, [key]: mark } });
-                  }}
-                />
-              );
-            })}
-          </div>
-        </Board>
-      ))}
+      {open.map(rowsOf)}
+      {answered.length > 0 && (
+        <More label={t('meeting.allOwn', { count: answered.length })}>
+          <div className="grid gap-4">{answered.map(rowsOf)}</div>
+        </More>
+      )}
       {problems['answers'] !== undefined && <p role="alert">{problems['answers']}</p>}
       <Button type="submit" look="main" full busy={save.isPending}>
         {t('meeting.save')}

@@ -2,23 +2,27 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { AnswerWord, OwnAnswer } from '#shared/contracts/reviews.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
+import { useActing } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { useToast } from '#src/ui/toast.js';
-import { usePutOwnAnswer, useTakeBackOwnAnswer } from '../api/own-entries-api.js';
+import { useLetOwnStand, usePutOwnAnswer, useTakeBackOwnAnswer } from '../api/own-entries-api.js';
 import type { VersionRef } from '../api/reviews-api.js';
 import { AnswerButtons } from './answer-buttons.js';
-import { NotePanel } from './note-panel.js';
+import { SpokenLine } from './answer-voice.js';
+import { NotePanel, type Speak } from './note-panel.js';
 
 /** The same four buttons as in the elders' review, for whoever keeps the entry. */
 export function OwnAnswerFoot({
   versionRef,
   entryId,
   answer,
+  speak,
   onAnswered,
 }: {
   versionRef: VersionRef;
   entryId: string;
   answer: OwnAnswer | null;
+  speak: Speak;
   onAnswered: () => void;
 }) {
   const { t } = useTranslation('reviews');
@@ -26,11 +30,17 @@ export function OwnAnswerFoot({
   const say = useToast();
   const put = usePutOwnAnswer(versionRef);
   const takeBack = useTakeBackOwnAnswer(versionRef);
+  const letStand = useLetOwnStand(versionRef);
+  const { displayName } = useActing();
   const [noteFor, setNoteFor] = useState<AnswerWord | null>(null);
 
-  const save = async (chosen: AnswerWord, note: string): Promise<boolean> => {
+  const save = async (
+    chosen: AnswerWord,
+    note: string,
+    recordingId = answer?.answer === chosen ? (answer.spoken?.attachmentId ?? null) : null,
+  ): Promise<boolean> => {
     try {
-      await put.mutateAsync({ entryId, answer: chosen, note });
+      await put.mutateAsync({ entryId, answer: chosen, note, recordingId });
     } catch (cause) {
       say(words.problem(cause));
       return false;
@@ -40,16 +50,14 @@ export function OwnAnswerFoot({
     onAnswered();
     return true;
   };
-  const forget = () => {
-    takeBack.mutate(entryId, {
-      onSuccess: () => {
-        say(t('takenBack'));
-      },
-      onError: (cause) => {
-        say(words.problem(cause));
-      },
-    });
-  };
+  const done = (sentence: string) => ({
+    onSuccess: () => {
+      say(sentence);
+    },
+    onError: (cause: Error) => {
+      say(words.problem(cause));
+    },
+  });
 
   if (noteFor !== null) {
     return (
@@ -59,8 +67,8 @@ export function OwnAnswerFoot({
           answer={noteFor}
           before={answer?.note ?? ''}
           busy={put.isPending}
-          speak={null}
-          onSave={(note) => save(noteFor, note)}
+          speak={speak}
+          onSave={(note, recordingId) => save(noteFor, note, recordingId ?? undefined)}
           onClose={() => {
             setNoteFor(null);
           }}
@@ -76,6 +84,7 @@ export function OwnAnswerFoot({
             {t('saidNow', { answer: t(`answer.${answer.answer}`) })}{' '}
             {answer.note !== '' && t('yourNote', { note: answer.note })}
           </span>
+          <SpokenLine answer={{ ...answer, elderName: displayName }} />
           <span className="flex flex-wrap">
             <Button
               look="quiet"
@@ -85,10 +94,27 @@ export function OwnAnswerFoot({
             >
               {answer.note === '' ? t('addNote') : t('changeNote')}
             </Button>
-            <Button look="quiet" busy={takeBack.isPending} onClick={forget}>
+            <Button
+              look="quiet"
+              busy={takeBack.isPending}
+              onClick={() => {
+                takeBack.mutate(entryId, done(t('takenBack')));
+              }}
+            >
               {t('takeBack')}
             </Button>
+            {answer.answer === 'change-this' && !answer.letStand && (
+              <Button
+                busy={letStand.isPending}
+                onClick={() => {
+                  letStand.mutate(entryId, done(t('letStandDone')));
+                }}
+              >
+                {t('letStand')}
+              </Button>
+            )}
           </span>
+          {answer.letStand && <span>{t('standing')}</span>}
         </div>
       )}
       <div className="answer-foot">

@@ -9,10 +9,10 @@ import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { ownEntriesQuery } from '../api/own-entries-api.js';
-import { OwnEntriesRound } from './own-entries-round.js';
+import { OwnEntriesRound, type BesideOwnEntry } from './own-entries-round.js';
 
 /** What somebody keeps with others of a submission in review, one entry at a time, in large type. */
-export function OwnEntriesPage() {
+export function OwnEntriesPage(beside: BesideOwnEntry) {
   const { t } = useTranslation('reviews');
   const { calendarId = '', number = '' } = useParams();
   const ref = { calendarId, number: Number(number) };
@@ -22,7 +22,7 @@ export function OwnEntriesPage() {
   usePageTitle(title);
 
   if (own.data && own.data.items.length > 0) {
-    return <OwnEntriesRound versionRef={ref} own={own.data} title={title} />;
+    return <OwnEntriesRound versionRef={ref} own={own.data} title={title} {...beside} />;
   }
   return (
     <Page className="review">

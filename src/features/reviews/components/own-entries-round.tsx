@@ -1,8 +1,9 @@
 import { ArrowLeft } from 'lucide-react';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { OwnEntries } from '#shared/contracts/reviews.js';
+import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import { paths } from '#src/lib/paths.js';
 import { Button, ButtonLink } from '#src/ui/button.js';
 import { ProgressPegs } from '#src/ui/pegs.js';
@@ -12,14 +13,23 @@ import { nextOpen } from '../model/answers-of.js';
 import { useFocusOnMove } from '../model/use-focus-on-move.js';
 import { EntrySteps } from './entry-steps.js';
 import { EntryView } from './entry-view.js';
+import type { Speak } from './note-panel.js';
 import { OwnAnswerFoot } from './own-answer-foot.js';
+
+/** What belongs to an entry besides its words, and the recorder of a voice about it. */
+export interface BesideOwnEntry {
+  about: (entry: VersionEntryBody) => ReactNode;
+  speak: (entry: VersionEntryBody, done: Parameters<Speak>[0]) => ReactNode;
+}
 
 /** Goes through the entries that the person keeps; behind the last one stands that everything is said. */
 export function OwnEntriesRound({
   versionRef,
   own,
   title,
-}: {
+  about,
+  speak,
+}: BesideOwnEntry & {
   versionRef: VersionRef;
   own: OwnEntries;
   title: string;
@@ -64,6 +74,7 @@ export function OwnEntriesRound({
           />
           <div className="review-entry">
             <p className="text-umber-soft">{t('own.keptHint')}</p>
+            {about(current.entry)}
             <p className="text-umber-soft">{t('silence')}</p>
             {items.length > 1 && <EntrySteps index={index} total={items.length} goTo={setIndex} />}
           </div>
@@ -72,6 +83,7 @@ export function OwnEntriesRound({
             versionRef={versionRef}
             entryId={current.entry.entryId}
             answer={current.answer}
+            speak={(done) => speak(current.entry, done)}
             onAnswered={() => {
               const after = new Map<string, unknown>(given).set(current.entry.entryId, null);
               setIndex(nextOpen(entryIds, after, index) ?? items.length);

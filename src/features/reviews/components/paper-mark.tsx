@@ -1,6 +1,7 @@
 import { useTranslation } from 'react-i18next';
-import { ANSWERS, type Answer, type AnswerWord } from '#shared/contracts/reviews.js';
-import { SelectField, TextField } from '#src/ui/field.js';
+import type { Answer, AnswerWord } from '#shared/contracts/reviews.js';
+import { TextField } from '#src/ui/field.js';
+import { PaperBoxes } from './paper-boxes.js';
 
 interface Mark {
   answer: AnswerWord | '';
@@ -30,21 +31,16 @@ export function PaperMark({
   }
   return (
     <div className="grid content-start gap-2">
-      <SelectField
+      <p aria-hidden className="font-bold">
+        {name}
+      </p>
+      <PaperBoxes
         label={t('meeting.answerOf', { name })}
         value={value.answer}
-        onChange={(event) => {
-          const chosen = event.currentTarget.value;
-          onChange({ ...value, answer: ANSWERS.find((each) => each === chosen) ?? '' });
+        onChange={(answer) => {
+          onChange({ ...value, answer });
         }}
-      >
-        <option value="">{t('meeting.none')}</option>
-        {ANSWERS.map((answer) => (
-          <option key={answer} value={answer}>
-            {t(`answer.${answer}`)}
-          </option>
-        ))}
-      </SelectField>
+      />
       {value.answer !== '' && value.answer !== 'agree' && (
         <TextField
           label={t('meeting.noteOf', { name })}
