@@ -275,7 +275,7 @@ export function createApp(options: AppOptions): App {
   const readBack = new ReadBackService(dataSource, contents, clock);
   sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
-  exportsRoutes(router, mount, new ExportsService(contents), feeds);
+  exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

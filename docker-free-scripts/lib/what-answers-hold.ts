@@ -141,6 +141,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   // Who says yes here says it to every use, so files to take along hold what the board holds.
   exportCalendarIcs: BOARD,
   exportCalendarCsv: BOARD,
+  exportCalendarJson: BOARD,
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },

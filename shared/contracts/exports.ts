@@ -55,6 +55,15 @@ export const exportsEndpoints = {
     query: csvQuery,
     fileType: 'text/csv',
   }),
+  json: defineEndpoint({
+    id: 'exportCalendarJson',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/calendar.json',
+    summary: 'A version or the draft as JSON with checksums, to be read back without loss',
+    access: member('calendar', ...ROLES),
+    params,
+    fileType: 'application/json',
+  }),
   listFeeds: defineEndpoint({
     id: 'listFeeds',
     method: 'GET',

@@ -1,7 +1,10 @@
 import ICAL from 'ical.js';
 import Papa from 'papaparse';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { createHash } from 'node:crypto';
 import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
+import { CALENDAR_FILE_PARTS, calendarFile, type CalendarFile } from '#shared/contracts/calendar-file.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { csvText, csvWords } from '#shared/kernel/csv.js';
 import { en } from '#shared/locales/index.js';
 import type { Entry } from '#shared/contracts/calendars.js';
@@ -184,5 +187,27 @@ describe('CSV', () => {
       ['Later in the draft', 'open', 'draft'],
     ]);
     await staff.get(path('draft', 'calendar.csv')).expect(404);
+  });
+});
+
+describe('JSON', () => {
+  it('is whole: its own form, every part with a checksum that another hand can make again', async () => {
+    const answer = await staff.get(path(published.number, 'calendar.json')).expect(200);
+    expect(answer.headers['content-type']).toContain('application/json');
+    const file = calendarFile.parse(answer.body);
+    for (const part of CALENDAR_FILE_PARTS) {
+      const text = canonicalJson((answer.body as CalendarFile)[part]);
+      expect(createHash('sha256').update(text).digest('hex')).toBe(file.checksums[part]);
+    }
+    expect(file.source).toMatchObject({ calendarId, number: published.number, versionHash: published.hash });
+    expect(file.entries.map(({ content }) => content)).toEqual([sow.content, watch.content]);
+    expect(file.source.cautions.join()).toContain('Never look at the Sun');
+  });
+
+  it('holds what other files hold, whoever asks, and the draft for those who see it', async () => {
+    const text = await textOf(village.elder, 'draft', 'calendar.json');
+    expect(text).toContain('Later in the draft');
+    expect(text).not.toMatch(/Of the elders|Not for telephones|salt/u);
+    await staff.get(path('draft', 'calendar.json')).expect(404);
   });
 });

@@ -24,6 +24,10 @@ export function exportsRoutes(
     const { content, fileName } = await files.csv(actor, params.calendarId, params.number, query);
     return new FileReply(content, fileName);
   });
+  mount.forMember(exportsEndpoints.json, async ({ params }, actor) => {
+    const { content, fileName } = await files.json(actor, params.calendarId, params.number);
+    return new FileReply(content, fileName);
+  });
   mount.forMember(exportsEndpoints.listFeeds, async (_call, actor) => wholeList(await feeds.list(actor)));
   mount.forMember(exportsEndpoints.makeFeed, (_call, actor) => feeds.make(actor));
   mount.forMember(exportsEndpoints.endFeed, async ({ params }, actor) => {

@@ -1,10 +1,12 @@
 import type { CsvQuery, IcsQuery } from '#shared/contracts/exports.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
+import type { Clock } from '../../http/context.js';
 import { fileNameOf } from '../../print/file-name.js';
 import { translatorFor } from '../../print/translator.js';
 import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
 import { calendarCsv } from './calendar-csv.js';
+import { calendarFileOf } from './calendar-file.service.js';
 import { calendarIcs } from './calendar-ics.js';
 
 interface ExportedFile {
@@ -14,7 +16,10 @@ interface ExportedFile {
 
 /** Files to take along. They hold what the village's board may hold and what was agreed to be put into calendars. */
 export class ExportsService {
-  constructor(private readonly contents: FrozenContentService) {}
+  constructor(
+    private readonly contents: FrozenContentService,
+    private readonly clock: Clock,
+  ) {}
 
   async ics(actor: Actor, calendarId: string, number: string, query: IcsQuery): Promise<ExportedFile> {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
@@ -25,6 +30,13 @@ export class ExportsService {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
     const text = calendarCsv(content, { mark: mark === 'yes', levels: seesDrafts(actor) });
     return { content: text, fileName: nameOf(content, 'csv') };
+  }
+
+  /** The whole of it, to be read back. */
+  async json(actor: Actor, calendarId: string, number: string): Promise<ExportedFile> {
+    const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
+    const file = calendarFileOf(content, calendarId, this.clock.now());
+    return { content: JSON.stringify(file, null, 1), fileName: nameOf(content, 'json') };
   }
 }
 

@@ -12,6 +12,7 @@ export const texts = {
     daysAhead_other: '{{count}} days ahead',
     ics: 'For a telephone’s calendar',
     csv: 'As a table (CSV)',
+    json: 'Whole, to bring back in (JSON)',
   },
   feeds: {
     title: 'Always fresh on your telephone',

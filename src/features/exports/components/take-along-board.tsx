@@ -1,4 +1,4 @@
-import { CalendarDays, Printer, Table } from 'lucide-react';
+import { CalendarDays, FileJson, Printer, Table } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { exportsEndpoints } from '#shared/contracts/exports.js';
@@ -61,6 +61,13 @@ export function TakeAlongBoard({ calendarId, number, isPublished }: TakeAlongBoa
           icon={<Table aria-hidden size={20} />}
         >
           {t('along.csv')}
+        </ButtonAnchor>
+        <ButtonAnchor
+          href={apiUrl(exportsEndpoints.json, { params, query: {} })}
+          download
+          icon={<FileJson aria-hidden size={20} />}
+        >
+          {t('along.json')}
         </ButtonAnchor>
       </div>
     </Board>
