@@ -32,6 +32,8 @@ import { ExportsService } from './features/exports/exports.service.js';
 import { FeedsService } from './features/exports/feeds.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
+import { FileImportService } from './features/imports/file-import.service.js';
+import { importsRoutes } from './features/imports/imports.routes.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
 import { LetterPlannerService } from './features/letters/letter-planner.service.js';
 import { LetterRounds } from './features/letters/letter-rounds.service.js';
@@ -276,6 +278,7 @@ export function createApp(options: AppOptions): App {
   sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
   exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
+  importsRoutes(mount, new FileImportService(dataSource, clock, options.withdrawals));
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

@@ -65,6 +65,7 @@ export const AUDIT_ACTIONS = [
   'calendar-begun',
   'calendar-rolled-over',
   'draft-restored',
+  'entries-brought-in',
   'entry-added',
   'entry-changed',
   'entry-copied',

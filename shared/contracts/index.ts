@@ -24,6 +24,7 @@ import { privacyEndpoints } from './privacy.js';
 import { reviewsEndpoints } from './reviews.js';
 import { rolloversEndpoints } from './rollovers.js';
 import { sessionEndpoints } from './session.js';
+import { importsEndpoints } from './imports.js';
 import { sharingEndpoints } from './sharing.js';
 import { sheetsEndpoints } from './sheets.js';
 import { signsEndpoints } from './signs.js';
@@ -65,6 +66,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   attachmentsEndpoints,
   sheetsEndpoints,
   exportsEndpoints,
+  importsEndpoints,
   sharingEndpoints,
   notesEndpoints,
   withdrawalsEndpoints,

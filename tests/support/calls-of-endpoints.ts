@@ -168,6 +168,7 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
     putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
+    importCalendarFile: () => ({ key: randomUUID(), dryRun: true }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
     addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),

@@ -25,6 +25,7 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
+import { CalendarImportEntity } from './calendar-import.entity.js';
 import { RolledItemEntity } from './rolled-item.entity.js';
 import { RolloverEntity } from './rollover.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
@@ -79,4 +80,5 @@ export const ENTITIES = [
   ConsentEntity,
   RolloverEntity,
   RolledItemEntity,
+  CalendarImportEntity,
 ];

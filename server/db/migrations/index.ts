@@ -21,6 +21,7 @@ import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 import { Signs1799000000000 } from './1799000000000-signs.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
+import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -47,4 +48,5 @@ export const MIGRATIONS = [
   Signs1799000000000,
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
+  CalendarImports1798900000000,
 ];

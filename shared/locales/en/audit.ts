@@ -71,6 +71,7 @@ export const texts = {
     'calendar-begun': '{{actor}} began the calendar {{subject}}.',
     'calendar-rolled-over': '{{actor}} began the calendar {{subject}} from the year before.',
     'draft-restored': '{{actor}} set the draft of {{subject}} back to what a version says.',
+    'entries-brought-in': '{{actor}} brought entries into the draft of {{subject}} {{way}}: {{number}}.',
     'entry-added': '{{actor}} added the entry “{{subject}}”.',
     'entry-changed': '{{actor}} changed the entry “{{subject}}”: {{fields}}.',
     'entry-copied': '{{actor}} made a copy: “{{subject}}”.',
@@ -96,6 +97,11 @@ export const texts = {
     'not-now': 'not now',
     refused: 'no',
     withdrawn: 'taken back',
+  },
+  way: {
+    file: 'from its own file',
+    table: 'from a table',
+    village: 'from another village',
   },
   attachment: {
     recording: 'a recording',

@@ -80,6 +80,13 @@ export const texts = {
     'own-answer-stands': 'This elder has answered for themselves. Only they can change that answer.',
     'elder-has-signed': 'This elder has signed, so the answer stays. Take the submission back to ask again.',
     'no-change-asked': 'Only the elder who asked for a change can let it stand.',
+    'key-used': 'This was sent for another calendar already. Choose the file again.',
+    'other-file-version':
+      'This file is of another form than is read here. Export it anew, or bring Dawnpeg up to date.',
+    'file-changed':
+      'This file is not as it was written: a checksum does not fit. Nothing was brought in; export it anew.',
+    'file-of-other-village':
+      'This file comes from a calendar that is not this village’s. Copying to another village is a way of its own.',
     'too-many-entries': 'A calendar holds at most 500 entries. Take one out first.',
     'order-differs': 'The list has changed meanwhile. Load it again, then set the order.',
     'nothing-to-restore': 'This entry stands in the draft already.',
@@ -226,6 +233,7 @@ export const texts = {
     'declination-range': 'A declination lies between −90 and 90 degrees.',
     'depth-range': 'Write how deep the Sun must be, between 4 and 25 degrees.',
     'consent-clip-first': 'Record first that the speaker agrees; then the recording itself.',
+    'not-a-calendar-file': 'This is no calendar file. Choose one that was taken along as “whole (JSON)”.',
     'not-a-picture': 'This is no picture that can be shown here. Choose a JPEG, PNG or WebP.',
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',
     'uses-need-yes': 'Ticks need a yes. Choose “Yes” above, or take the ticks out.',
@@ -238,6 +246,8 @@ export const texts = {
   },
   /** Reasons that are said with what stands in the way. */
   named: {
+    'other-file-version':
+      'This file is of form {{names}}, and this Dawnpeg reads form 1. Export it anew, or bring Dawnpeg up to date.',
     'entries-hang-on-it':
       'These entries count their days from this one: {{names}}. Let them go by something else first.',
     'record-incomplete':

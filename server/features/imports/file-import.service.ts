@@ -1,0 +1,172 @@
+import type { CalendarFile } from '#shared/contracts/calendar-file.js';
+import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
+import type { FileImport } from '#shared/contracts/imports.js';
+import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import type { Sharing } from '#shared/contracts/sharing-tightness.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
+import { readFile } from 'node:fs/promises';
+import { In, type DataSource, type EntityManager } from 'typeorm';
+import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { MembershipEntity } from '../../db/entities/membership.entity.js';
+import { WithdrawalEntity } from '../../db/entities/withdrawal.entity.js';
+import { inTransaction } from '../../db/in-transaction.js';
+import type { Actor } from '../../http/actor.js';
+import { AppError, conflict } from '../../http/app-error.js';
+import type { Clock } from '../../http/context.js';
+import type { UploadedFile } from '../../http/upload.js';
+import { anybody, withKeptGiver } from '../../policy/giver-naming.js';
+import { isForVillage } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import { viewerOf } from '../../policy/viewer.js';
+import type { WithdrawalList } from '../../storage/withdrawal-list.js';
+import { knowsMarker, markerKeyOfLead } from '../calendars/sky-dates.service.js';
+import { figuresSeenBy } from '../figures/village-figures.service.js';
+import { readCalendarFile } from './calendar-file-reader.js';
+import { filePlan, type FilePlan, type KnownToday } from './file-plan.js';
+import { landOnce } from './landing.service.js';
+
+/** A calendar's own file, back in a draft of its village. */
+export class FileImportService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly clock: Clock,
+    private readonly withdrawals: WithdrawalList,
+  ) {}
+
+  async bringIn(
+    actor: Actor,
+    calendarId: string,
+    { key, dryRun }: { key: string; dryRun: boolean },
+    uploaded: UploadedFile,
+  ): Promise<FileImport> {
+    const file = readCalendarFile(await readFile(uploaded.path, 'utf8'));
+    const from = {
+      year: file.header.year,
+      placeName: file.header.place.name,
+      label: file.source.label,
+    };
+    await this.expectOfVillage(actor, file);
+    const listed = new Set((await this.withdrawals.all()).map(({ itemId }) => itemId));
+    if (dryRun) {
+      const { manager } = this.dataSource;
+      const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
+      if (calendar.outNumber !== null) throw new AppError('draft-locked');
+      const { entries, refused } = await this.plan(manager, actor, calendar.year, file, listed);
+      return { added: entries.length, refused, from };
+    }
+    const at = this.clock.now();
+    const landed = await inTransaction(this.dataSource, (manager) =>
+      landOnce(manager, actor, calendarId, { key, at }, async ({ year }) => ({
+        ...(await this.plan(manager, actor, year, file, listed)),
+        way: 'file',
+      })),
+    );
+    return { ...landed, from };
+  }
+
+  private async expectOfVillage({ communityId }: Actor, { source, header }: CalendarFile): Promise<void> {
+    const isOurs =
+      source.calendarId === header.calendarId &&
+      (await this.dataSource.manager.existsBy(CalendarEntity, { id: source.calendarId, communityId }));
+    if (!isOurs) throw conflict('file-of-other-village');
+  }
+
+  private async plan(
+    manager: EntityManager,
+    actor: Actor,
+    year: number,
+    file: CalendarFile,
+    listed: ReadonlySet<string>,
+  ): Promise<FilePlan> {
+    return filePlan(file, await this.today(manager, actor, year, file, listed));
+  }
+
+  private async today(
+    manager: EntityManager,
+    actor: Actor,
+    year: number,
+    { entries }: CalendarFile,
+    listed: ReadonlySet<string>,
+  ): Promise<KnownToday> {
+    const { communityId } = actor;
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    const figures = await figuresSeenBy(manager, viewer);
+    const entryIds = entries.map(({ entryId }) => entryId);
+    const variantIds = entries.flatMap(({ variants = [] }) => variants.map(({ variantId }) => variantId));
+    const shared = {
+      entry: await sharedById(manager, 'entry', entryIds),
+      variant: await sharedById(manager, 'variant', variantIds),
+    };
+    const taken = await manager.find(WithdrawalEntity, {
+      where: { itemId: In([...entryIds, ...variantIds]) },
+      select: { id: true, itemId: true },
+    });
+    const withdrawn = new Set([...listed, ...taken.map(({ itemId }) => itemId)]);
+    const rows = await byId(manager.findBy(EntryEntity, { id: In(entryIds) }));
+    const variantRows = await byId(manager.findBy(EntryVariantEntity, { id: In(variantIds) }));
+    const members = await manager.find(MembershipEntity, {
+      where: { communityId },
+      select: { id: true, personId: true },
+    });
+    const isMember = new Set(members.map(({ personId }) => personId));
+    const reader = anybody(viewer);
+    return {
+      isKnown: (entryId) => shared.entry.has(entryId),
+      mayCome: (itemType, itemId, lead) => {
+        const known = shared[itemType].get(itemId);
+        if (withdrawn.has(itemId) || !knowsLead(lead, figures)) return false;
+        // A timing that nobody knows has nobody who could take it back.
+        if (known === undefined) return itemType === 'entry';
+        return known.communityId === communityId && isForVillage(known, viewer.today);
+      },
+      wordsOf: ({ entryId, content }) => {
+        const known = shared.entry.get(entryId);
+        if (known === undefined) return unknownHere(content, isMember, year);
+        const row = rows.get(entryId);
+        const named = row ? withKeptGiver(reader, known, row.content, content) : content;
+        return sharedAsToday(inYear(named, year), known);
+      },
+      variantWordsOf: ({ variantId, content }) => {
+        const row = variantRows.get(variantId);
+        const known = shared.variant.get(variantId);
+        return row ? withKeptGiver(reader, known, row.content, content) : content;
+      },
+    };
+  }
+}
+
+async function byId<T extends { id: string }>(rows: Promise<T[]>): Promise<Map<string, T>> {
+  return new Map((await rows).map((row) => [row.id, row]));
+}
+
+function knowsLead(lead: EntryLead, figures: Parameters<typeof knowsMarker>[1]): boolean {
+  const markerKey = markerKeyOfLead(lead);
+  return markerKey === null || knowsMarker(markerKey, figures);
+}
+
+/** What the village does not know lands as a draft of its own: nothing agreed, and no wider than the village. */
+function unknownHere(content: EntryInput, isMember: ReadonlySet<string>, year: number): EntryInput {
+  const { sharing: _sharing, giverId, ...rest } = inYear(content, year);
+  return {
+    ...rest,
+    ...(typeof giverId === 'string' && isMember.has(giverId) ? { giverId } : {}),
+    agreedToPrint: false,
+    sharingLevel: content.kind === 'belief' ? 'elders' : 'village',
+  };
+}
+
+/** Its own words about how it is shared follow, so that the next edit does not ask for a wider circle. */
+function sharedAsToday({ sharing, ...content }: EntryInput, { level, details }: Sharing): EntryInput {
+  const isPlain = sharing === undefined && sameJson(details, PLAIN_DETAILS);
+  return { ...content, sharingLevel: level, ...(isPlain ? {} : { sharing: details }) };
+}
+
+/** A star that was seen in another year was not seen in this one. */
+function inYear(content: EntryInput, year: number): EntryInput {
+  const { lead } = content;
+  if (lead.type !== 'marker-as-seen' || lead.seen === null) return content;
+  const isNear = Math.abs(Number(lead.seen.date.slice(0, 4)) - year) <= 1;
+  return isNear ? content : { ...content, lead: { ...lead, seen: null } };
+}

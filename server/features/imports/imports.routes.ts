@@ -1,0 +1,9 @@
+import { importsEndpoints } from '#shared/contracts/imports.js';
+import type { Mount } from '../../http/mount.js';
+import type { FileImportService } from './file-import.service.js';
+
+export function importsRoutes(mount: Mount, files: FileImportService): void {
+  mount.forMemberUpload(importsEndpoints.file, ({ params, body }, actor, file) =>
+    files.bringIn(actor, params.calendarId, body, file),
+  );
+}

@@ -1,0 +1,135 @@
+import { ENTRIES_MAX, type EntryInput } from '#shared/contracts/calendars.js';
+import type { VariantInput } from '#shared/contracts/variants.js';
+import type { EntityManager } from 'typeorm';
+import { CalendarImportEntity } from '../../db/entities/calendar-import.entity.js';
+import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
+import { RolledItemEntity } from '../../db/entities/rolled-item.entity.js';
+import type { Actor } from '../../http/actor.js';
+import { AppError, conflict } from '../../http/app-error.js';
+import { copySharing, insertSharing } from '../../policy/sharing.repository.js';
+import { viewerOf } from '../../policy/viewer.js';
+import { recordAudit } from '../audit/audit.service.js';
+import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
+import { liveEntries, writeOrder } from '../calendars/calendars.repository.js';
+import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
+import { sharingOf } from '../calendars/entry-sharing.service.js';
+
+/** The way by which something came into a draft. */
+export type ImportWay = 'file' | 'table' | 'village';
+
+export interface LandingEntry {
+  id: string;
+  content: EntryInput;
+  /** The same thing in another draft of this village: its level, giver and consents go along, and so does taking it back. */
+  sameAs: string | null;
+  variants: readonly { id: string; content: VariantInput; sameAs: string }[];
+}
+
+export interface Landed {
+  added: number;
+  refused: number;
+}
+
+export interface Landing {
+  way: ImportWay;
+  entries: readonly LandingEntry[];
+  refused: number;
+}
+
+/**
+ * Puts entries behind those of an open draft, all or none, once for each key. `prepare` is asked only where the key is
+ * new, with the calendar locked; what it throws keeps everything as it was.
+ */
+export async function landOnce(
+  manager: EntityManager,
+  actor: Actor,
+  calendarId: string,
+  { key, at }: { key: string; at: Date },
+  prepare: (calendar: CalendarEntity) => Promise<Landing>,
+): Promise<Landed> {
+  const calendar = await lockCalendar(manager, calendarId);
+  const known = await manager.findOneBy(CalendarImportEntity, { importKey: key });
+  if (known !== null) {
+    if (known.calendarId !== calendarId || known.broughtBy !== actor.person.id) throw conflict('key-used');
+    return { added: known.added, refused: known.refused };
+  }
+  if (calendar.outNumber !== null) throw new AppError('draft-locked');
+  const landing = await prepare(calendar);
+  await land(manager, actor, calendar, landing, at);
+  const landed = { added: landing.entries.length, refused: landing.refused };
+  await manager.insert(CalendarImportEntity, {
+    ...{ importKey: key, calendarId, broughtBy: actor.person.id, broughtAt: at },
+    ...landed,
+  });
+  return landed;
+}
+
+async function land(
+  manager: EntityManager,
+  actor: Actor,
+  { id: calendarId }: CalendarEntity,
+  { way, entries }: Landing,
+  at: Date,
+): Promise<void> {
+  if (entries.length === 0) return;
+  const before = (await liveEntries(manager, calendarId)).map(({ id }) => id);
+  if (before.length + entries.length > ENTRIES_MAX) throw conflict('too-many-entries');
+  const { communityId, person } = actor;
+  const touched = { updatedBy: person.id, updatedAt: at };
+  for (const [index, { id, content, sameAs, variants }] of entries.entries()) {
+    const position = before.length + index;
+    await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
+    if (sameAs === null) {
+      const giverId = content.giverId ?? person.id;
+      await insertSharing(manager, {
+        itemType: 'entry',
+        itemId: id,
+        communityId,
+        ...sharingOf(content),
+        giverId,
+      });
+    } else await goAlong(manager, 'entry', calendarId, sameAs, id);
+    for (const variant of variants) {
+      await manager.insert(EntryVariantEntity, {
+        ...{ id: variant.id, entryId: id, content: variant.content, addedAt: at },
+        ...touched,
+      });
+      await goAlong(manager, 'variant', calendarId, variant.sameAs, variant.id);
+    }
+  }
+  await expectAnchored(manager, actor, calendarId, entries, at);
+  await writeOrder(manager, [...before, ...entries.map(({ id }) => id)]);
+  await recordContribution(manager, calendarId, person.id, at);
+  await recordAudit(manager, {
+    ...{ at, communityId, actorId: person.id, action: 'entries-brought-in' },
+    ...{ subjectType: 'calendar', subjectId: calendarId, details: { number: entries.length, way } },
+  });
+}
+
+/** What counts its days from another one does so rightly; a refusal takes everything back. */
+async function expectAnchored(
+  manager: EntityManager,
+  actor: Actor,
+  calendarId: string,
+  entries: readonly LandingEntry[],
+  at: Date,
+): Promise<void> {
+  const viewer = await viewerOf(manager, actor, at);
+  for (const [index, { id, content }] of entries.entries()) {
+    const field = `entries.${String(index)}.content.lead`;
+    await expectGoodAnchor(manager, viewer, calendarId, { id, content }, field);
+  }
+}
+
+async function goAlong(
+  manager: EntityManager,
+  itemType: 'entry' | 'variant',
+  calendarId: string,
+  fromId: string,
+  itemId: string,
+): Promise<void> {
+  await copySharing(manager, itemType, fromId, itemId);
+  await manager.insert(RolledItemEntity, { itemId, itemType, fromId, calendarId, before: null });
+}

@@ -1,0 +1,217 @@
+import { createHash, randomUUID } from 'node:crypto';
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import type { CalendarFile } from '#shared/contracts/calendar-file.js';
+import type { Entry } from '#shared/contracts/calendars.js';
+import type { FileImport } from '#shared/contracts/imports.js';
+import type { Problem } from '#shared/contracts/problem.js';
+import { PlaceEntity } from '#server/db/entities/place.entity.js';
+import { canonicalJson } from '#shared/kernel/canonical-json.js';
+import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import {
+  addEntry,
+  beginCalendar,
+  entriesOf,
+  openVillage,
+  publishDraft,
+  reasonOf,
+  submit,
+  type Village,
+} from '#tests/support/calendar-api.js';
+import { addConsent } from '#tests/support/consent-api.js';
+import { details } from '#tests/support/sharing-api.js';
+import { addVariant } from '#tests/support/variant-api.js';
+
+/** A calendar's own file, back in a draft of its village. */
+let api: TestApi;
+let village: Village;
+let fromId: string;
+let intoId: string;
+let sow: Entry;
+beforeAll(async () => {
+  api = await openTestApi();
+});
+beforeEach(async () => {
+  await api.reset();
+  village = await openVillage(api);
+  fromId = (await beginCalendar(village)).id;
+  // A calendar of the same sky and year: a second place with all that the first has.
+  const places = api.dataSource.getRepository(PlaceEntity);
+  const twinId = randomUUID();
+  await places.insert(Object.assign(await places.findOneByOrFail({ id: village.placeId }), { id: twinId }));
+  intoId = (await beginCalendar({ ...village, placeId: twinId })).id;
+  sow = await addEntry(village.officer, fromId, { giverId: village.elder.personId });
+});
+afterAll(() => api.close());
+
+const exported = async (calendarId: string, number = 'draft') =>
+  (await village.officer.get(`/api/calendars/${calendarId}/versions/${number}/calendar.json`).expect(200))
+    .body as CalendarFile;
+const send = (client: Client, file: unknown, { into = intoId, key = randomUUID(), dryRun = false } = {}) =>
+  client.upload(
+    `/api/calendars/${into}/imports/file`,
+    { key, dryRun },
+    Buffer.from(typeof file === 'string' ? file : JSON.stringify(file)),
+  );
+const bringIn = async (file: unknown, options = {}) =>
+  (await send(village.officer, file, options).expect(200)).body as FileImport;
+const draftOf = (calendarId = intoId) => entriesOf(village.officer, calendarId);
+
+describe('a file that comes back', () => {
+  it('loses nothing: what is exported again is the same but for ids and stamps', async () => {
+    const { officer, elder, elder3 } = village;
+    const { variantId } = await addVariant(elder3, fromId, sow.id);
+    const content = {
+      ...sow.content,
+      board: { shows: 'variant' as const, variantId, reason: 'It came first for three years' },
+    };
+    await officer
+      .put(`/api/calendars/${fromId}/entries/${sow.id}`, { content, version: sow.version })
+      .expect(200);
+    await addEntry(officer, fromId, {
+      titleOfficer: 'Weed',
+      lead: { type: 'entry-planned', entryId: sow.id, day: 'bestTo' },
+      sharingLevel: 'village',
+      ifLate: '=-5, "quoted"\nand more',
+    });
+    const feast = await addEntry(officer, fromId, {
+      ...{ titleOfficer: 'Feast', kind: 'belief', giver: 'Hidden', giverId: elder.personId },
+      sharing: details({ naming: 'role' }),
+    });
+    const said = { uses: ['keep', 'show', 'print', 'feed'] as const, giverId: elder.personId };
+    await addConsent(officer, 'entry', feast.id, { ...said, uses: [...said.uses] });
+    const before = await exported(fromId);
+    expect(before.entries).toHaveLength(3);
+    expect(await bringIn(before)).toMatchObject({ added: 3, refused: 0 });
+    const after = await exported(intoId);
+    expect(plain(after)).toEqual(plain(before));
+    expect(new Set([...before.entries, ...after.entries].map(({ entryId }) => entryId)).size).toBe(6);
+  });
+
+  it('is a draft: nobody has agreed to it, and whoever brought it in has written to it', async () => {
+    const published = await publishDraft(village, fromId);
+    await bringIn(await exported(fromId, String(published.number)));
+    const version = await submit(village.officer, intoId);
+    expect(version).toMatchObject({ state: 'in-review', signatures: [], label: null });
+    expect(version.gaps).not.toEqual([]);
+  });
+
+  it('comes behind what stands there, once, however often it is sent', async () => {
+    await addEntry(village.officer, intoId, { titleOfficer: 'There before' });
+    const file = await exported(fromId);
+    const key = randomUUID();
+    const sent = await Promise.all([bringIn(file, { key }), bringIn(file, { key })]);
+    expect(sent.map(({ added }) => added)).toEqual([1, 1]);
+    await submit(village.officer, intoId);
+    expect(await bringIn(file, { key })).toMatchObject({ added: 1 });
+    expect((await draftOf()).map(({ content }) => content.titleOfficer)).toEqual([
+      'There before',
+      'Sow long millet',
+    ]);
+    expect(reasonOf(await send(village.officer, file, { key, into: fromId }))).toBe('409 key-used');
+    expect(reasonOf(await send(village.officer, file))).toBe('409 draft-locked');
+  });
+
+  it('is tried first without a trace', async () => {
+    expect(await bringIn(await exported(fromId), { dryRun: true })).toEqual({
+      ...{ added: 1, refused: 0 },
+      from: { year: 2027, placeName: 'Upper terraces', label: null },
+    });
+    expect(await draftOf()).toEqual([]);
+  });
+});
+
+describe('what was taken back or is kept since', () => {
+  it('stays out, with what counts its days from it; how many is said, and not which', async () => {
+    const { elder, officer } = village;
+    await addEntry(officer, fromId, {
+      titleOfficer: 'Weed',
+      lead: { type: 'entry-planned', entryId: sow.id, day: 'bestTo' },
+    });
+    await addEntry(officer, fromId, { titleOfficer: 'Mend' });
+    const file = await exported(fromId);
+    const item = `/api/communities/${elder.communityId}/items/entry/${sow.id}`;
+    await elder.post(`${item}/withdrawal`, { leavesTrace: false, askedById: null }).expect(204);
+    const answer = await send(officer, file).expect(200);
+    expect(answer.body).toMatchObject({ added: 1, refused: 2 });
+    expect(JSON.stringify(answer.body)).not.toMatch(/Sow|Weed/u);
+    expect((await draftOf()).map(({ content }) => content.titleOfficer)).toEqual(['Mend']);
+  });
+
+  it('stays out where it is paused, narrower or no longer agreed to', async () => {
+    const { elder, officer } = village;
+    const narrow = await addEntry(officer, fromId, { giverId: elder.personId });
+    const refused = await addEntry(officer, fromId);
+    const file = await exported(fromId);
+    const items = `/api/communities/${elder.communityId}/items/entry`;
+    await elder.post(`${items}/${sow.id}/pause`, { askedById: null }).expect(204);
+    const { version } = (await elder.get(`${items}/${narrow.id}/sharing`).expect(200)).body as {
+      version: number;
+    };
+    const sharing = { level: 'elders', ...details() };
+    await elder.put(`${items}/${narrow.id}/sharing`, { sharing, version }).expect(200);
+    await addConsent(officer, 'entry', refused.id, { answer: 'refused', uses: [] });
+    expect(await bringIn(file)).toMatchObject({ added: 0, refused: 3 });
+  });
+
+  it('goes from where it was brought in when it is taken back where it came from', async () => {
+    await bringIn(await exported(fromId));
+    const item = `/api/communities/${village.elder.communityId}/items/entry/${sow.id}`;
+    await village.elder.post(`${item}/withdrawal`, { leavesTrace: false, askedById: null }).expect(204);
+    expect(await draftOf()).toEqual([]);
+  });
+});
+
+describe('a file that does not fit', () => {
+  it('is told by its form, its checksum, its village or its kind; nothing comes in', async () => {
+    const file = await exported(fromId);
+    const newer = await send(village.officer, { ...file, schemaVersion: 2 });
+    expect(reasonOf(newer)).toBe('409 other-file-version');
+    expect((newer.body as Problem).names).toEqual(['2']);
+    const [first] = file.entries;
+    const touched = { ...file, entries: [{ ...first, entryId: randomUUID() }] };
+    expect(reasonOf(await send(village.officer, touched))).toBe('409 file-changed');
+    const lone = JSON.stringify(file).replace('Sow long millet', '\\ud800');
+    expect(reasonOf(await send(village.officer, lone))).toBe('409 file-changed');
+    const elsewhere = sealed({ ...file, source: { ...file.source, calendarId: randomUUID() } });
+    expect(reasonOf(await send(village.officer, elsewhere))).toBe('409 file-of-other-village');
+    const extra = sealed({ ...file, entries: [{ ...first, secret: 1 } as never] });
+    for (const bad of [extra, 'PK no JSON', { format: 'another' }, '[]']) {
+      const answer = await send(village.officer, bad).expect(422);
+      expect((answer.body as Problem).errors).toMatchObject([{ field: 'file', code: 'not-a-calendar-file' }]);
+    }
+    expect(await draftOf()).toEqual([]);
+  });
+
+  it('brings no belief to the whole village, and no name and no yes of its own making', async () => {
+    const file = await exported(fromId);
+    const [first] = file.entries;
+    if (first === undefined) throw new Error('The file is empty.');
+    const content = { ...first.content, kind: 'belief' as const, agreedToPrint: true, giverId: randomUUID() };
+    await bringIn(sealed({ ...file, entries: [{ ...first, entryId: randomUUID(), content }] }));
+    expect(await entriesOf(village.steward, intoId)).toEqual([]);
+    const [seen] = await entriesOf(village.elder, intoId);
+    expect(seen?.content).toMatchObject({ sharingLevel: 'elders', agreedToPrint: false });
+    expect(seen?.content).not.toHaveProperty('giverId');
+  });
+});
+
+/** With checksums that fit, as somebody would make them who writes a file of their own. */
+function sealed(file: CalendarFile): CalendarFile {
+  const sum = (part: unknown) => createHash('sha256').update(canonicalJson(part)).digest('hex');
+  const { source, header, entries } = file;
+  return { ...file, checksums: { source: sum(source), header: sum(header), entries: sum(entries) } };
+}
+
+/** Ids by the order in which they come, and no stamps. */
+function plain({ header, entries }: CalendarFile): unknown {
+  const { calendarId: _id, number: _number, submittedAt: _at, ...rest } = header;
+  const ids = entries.flatMap(({ entryId, variants = [] }) => [
+    entryId,
+    ...variants.map(({ variantId }) => variantId),
+  ]);
+  const text = ids.reduce(
+    (all, id, index) => all.replaceAll(id, `#${String(index)}`),
+    JSON.stringify(entries),
+  );
+  return { header: rest, entries: JSON.parse(text) as unknown };
+}
