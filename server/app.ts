@@ -33,6 +33,7 @@ import { FeedsService } from './features/exports/feeds.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
 import { FileImportService } from './features/imports/file-import.service.js';
+import { TableImportService } from './features/imports/table-import.service.js';
 import { importsRoutes } from './features/imports/imports.routes.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
 import { LetterPlannerService } from './features/letters/letter-planner.service.js';
@@ -278,7 +279,11 @@ export function createApp(options: AppOptions): App {
   sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
   exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
-  importsRoutes(mount, new FileImportService(dataSource, clock, options.withdrawals));
+  importsRoutes(
+    mount,
+    new FileImportService(dataSource, clock, options.withdrawals),
+    new TableImportService(dataSource, clock, sky),
+  );
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

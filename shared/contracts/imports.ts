@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { CALENDAR_FILE_MAX_BYTES } from './calendar-file.js';
+import { entryWarning, entryWindow } from './calendars.js';
 import { id } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 
@@ -16,6 +17,75 @@ export const fileImport = z.strictObject({
 });
 export type FileImport = z.infer<typeof fileImport>;
 
+/** Columns that a table may have: those of the CSV that make an entry, and plainer ones for tables of other hands. */
+export const IMPORT_COLUMNS = [
+  'titleVillage',
+  'titleOfficer',
+  'kind',
+  'icon',
+  'crop',
+  /** What leads, in words: `Pleiades, first morning`, or a day of the year. */
+  'when',
+  'earliest',
+  'bestFrom',
+  'bestTo',
+  'lastAdvised',
+  'earliestDays',
+  'bestFromDays',
+  'bestToDays',
+  'lastAdvisedDays',
+  'leadType',
+  'leadMarker',
+  'leadPhenomenon',
+  'leadOccurrence',
+  'leadDate',
+  'leadSource',
+  'leadOther',
+  'lastDate',
+  'lastDateSource',
+  'protectiveWatch',
+  'otherSigns',
+  'ifLate',
+  'caution',
+  'notes',
+  'giver',
+] as const;
+export type ImportColumn = (typeof IMPORT_COLUMNS)[number];
+
+export const IMPORT_LINES_MAX = 500;
+const CELL_MAX = 4000;
+
+export const tableLine = z.strictObject({
+  /** As the spreadsheet counts it, for whoever has to put something right there. */
+  line: z.number().int().min(1),
+  cells: z.partialRecord(z.enum(IMPORT_COLUMNS), z.string().max(CELL_MAX, 'too-long')),
+});
+export type TableLine = z.infer<typeof tableLine>;
+
+export const tableInput = z.strictObject({
+  key,
+  dryRun: z.boolean(),
+  /** How `6/7` is meant; null where the table has no such days, or nobody has said so yet. */
+  dayOrder: z.enum(['day-first', 'month-first']).nullable(),
+  lines: z.array(tableLine).min(1).max(IMPORT_LINES_MAX, 'too-many'),
+});
+export type TableInput = z.infer<typeof tableInput>;
+
+/** What a line would become, and everything that is the matter with it. */
+export const readLine = z.strictObject({
+  line: z.number().int(),
+  title: z.string(),
+  protectiveWatch: z.boolean(),
+  /** Null where something is the matter, or the sign has no day in this year. */
+  window: entryWindow.nullable(),
+  warnings: z.array(entryWarning),
+  problems: z.array(z.strictObject({ column: z.enum(IMPORT_COLUMNS), code: z.string() })),
+});
+export type ReadLine = z.infer<typeof readLine>;
+
+export const tableImport = z.strictObject({ added: z.number().int(), lines: z.array(readLine) });
+export type TableImport = z.infer<typeof tableImport>;
+
 const params = z.strictObject({ calendarId: id });
 
 /** What is brought into a draft. All of it lands as a draft, or nothing does. */
@@ -30,5 +100,16 @@ export const importsEndpoints = {
     body: z.strictObject({ key, dryRun: z.boolean() }),
     upload: { maxBytes: CALENDAR_FILE_MAX_BYTES },
     response: fileImport,
+  }),
+  table: defineEndpoint({
+    id: 'importTable',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/imports/table',
+    summary:
+      'Bring lines of a table into a draft, all or none; with dryRun each is told what it would become',
+    access: member('calendar', 'officer'),
+    params,
+    body: tableInput,
+    response: tableImport,
   }),
 } as const;

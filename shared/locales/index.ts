@@ -13,6 +13,7 @@ import { texts as files } from './en/files.js';
 import { texts as finder } from './en/finder.js';
 import { texts as helping } from './en/helping.js';
 import { texts as moves } from './en/moves.js';
+import { texts as imports } from './en/imports.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
 import { texts as look } from './en/look.js';
@@ -55,6 +56,7 @@ export const en = {
   finder,
   drift,
   exports,
+  imports,
   moons,
   moves,
   air,

@@ -116,6 +116,11 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['rollovers', 'calendars', 'sky', 'moves'],
     load: () => import('./routes/rollover.js'),
   },
+  {
+    path: PATTERNS.moves,
+    texts: ['imports', 'exports', 'files', 'calendars', 'sky'],
+    load: () => import('./routes/moves.js'),
+  },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,

@@ -42,6 +42,7 @@ export const PATTERNS = {
   meeting: '/calendars/:calendarId/versions/:number/meeting',
   compare: '/calendars/:calendarId/compare',
   rollover: '/calendars/:calendarId/rollover',
+  moves: '/calendars/:calendarId/moves',
   sheet: '/calendars/:calendarId/sheet',
   takeBack: '/take-back/:communityId/:itemType/:itemId',
 } as const;
@@ -132,6 +133,8 @@ export const paths = {
     withQuery(`${calendarPath(calendarId)}/compare`, query),
   /** What the new year changed in a draft that was rolled over. */
   rollover: (calendarId: string) => `${calendarPath(calendarId)}/rollover`,
+  /** What is taken along of a draft and brought into it. */
+  moves: (calendarId: string) => `${calendarPath(calendarId)}/moves`,
   sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/sheet`, query),
   takeBack: (communityId: string, itemType: SharedItemType, itemId: string) =>

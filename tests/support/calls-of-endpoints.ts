@@ -169,6 +169,10 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     updateEntry: () => ({ content: entryInput(), ...stale }),
     putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
     importCalendarFile: () => ({ key: randomUUID(), dryRun: true }),
+    importTable: () => ({
+      ...{ key: randomUUID(), dryRun: true, dayOrder: null },
+      lines: [{ line: 2, cells: { titleOfficer: 'Mend', kind: 'farm', bestFrom: '06-07' } }],
+    }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
     addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),

@@ -117,6 +117,7 @@ export const texts = {
     unsaved_one: '{{count}} entry is not saved yet; it is kept on this device.',
     unsaved_other: '{{count}} entries are not saved yet; they are kept on this device.',
     compare: 'Compare',
+    moves: 'Take along, bring in',
     versions: 'Versions',
     submit: 'Submit for review',
     save: 'Save the entry',

@@ -233,6 +233,21 @@ export const texts = {
     'declination-range': 'A declination lies between −90 and 90 degrees.',
     'depth-range': 'Write how deep the Sun must be, between 4 and 25 degrees.',
     'consent-clip-first': 'Record first that the speaker agrees; then the recording itself.',
+    'date-not-read':
+      'This is not read as a day. Write it as 2027-06-14, 14.6., 14 June, June 2 (a ten-day part) or Pleiades first morning +7.',
+    'other-year':
+      'This day is of another year than the calendar. Take the year away, or bring it into that year’s calendar.',
+    'which-first': 'Say above whether the day or the month comes first in days such as 6/7.',
+    'unknown-star-name':
+      'The village knows no star or figure of this name. Use its name from the list of stars.',
+    'unknown-sign':
+      'No sign goes by these words. Name a star with its day, such as “Pleiades, first morning”, or write a day of the year.',
+    'date-missing': 'This line says no day. Name a sign, or write from when the best days are.',
+    'mixed-dates': 'This line names two signs. Let all its days go by one of them.',
+    'days-missing': 'Say how many days after the sign the best days begin; a minus means before it.',
+    'unknown-kind': 'This kind is not known. Use one such as farm, household, community, belief or safety.',
+    'needs-another-entry':
+      'What counts from another entry comes in with a calendar’s own file, not with a table.',
     'not-a-calendar-file': 'This is no calendar file. Choose one that was taken along as “whole (JSON)”.',
     'not-a-picture': 'This is no picture that can be shown here. Choose a JPEG, PNG or WebP.',
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',

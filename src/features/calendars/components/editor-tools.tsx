@@ -1,4 +1,4 @@
-import { Check, GitCompareArrows, Layers, Send } from 'lucide-react';
+import { ArrowLeftRight, Check, GitCompareArrows, Layers, Send } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { paths } from '#src/lib/paths.js';
 import { Button, ButtonLink } from '#src/ui/button.js';
@@ -49,6 +49,9 @@ export function ToolLinks({ editor, onSubmit }: { editor: Editor; onSubmit: () =
           {t('editor.compare')}
         </ButtonLink>
       )}
+      <ButtonLink to={paths.moves(calendar.id)} icon={<ArrowLeftRight aria-hidden size={20} />}>
+        {t('editor.moves')}
+      </ButtonLink>
       {canOrder && shown.length > 0 && (
         <Button icon={<Send aria-hidden className="turns" size={20} />} onClick={onSubmit}>
           {t('editor.submit')}

@@ -63,7 +63,7 @@ export function TakeAlongBoard({ calendarId, number, isPublished }: TakeAlongBoa
           {t('along.csv')}
         </ButtonAnchor>
         <ButtonAnchor
-          href={apiUrl(exportsEndpoints.json, { params, query: {} })}
+          href={apiUrl(exportsEndpoints.json, { params })}
           download
           icon={<FileJson aria-hidden size={20} />}
         >

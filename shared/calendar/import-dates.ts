@@ -1,0 +1,166 @@
+import { daysInMonth } from '#shared/kernel/iso-date.js';
+import type { Phenomenon } from '#shared/sky/index.js';
+import type { MonthDay } from './entry-model.js';
+
+/** Words of one language by which a table may name days; all of them are compared without case. */
+export interface ImportWords {
+  /** Twelve lists, January first: full names and short ones. */
+  months: readonly (readonly string[])[];
+  /** How each day of a star may be called. */
+  phenomena: Readonly<Record<Phenomenon, readonly string[]>>;
+  /** Before a day of the civil year, such as `Fixed date: 07-05`. */
+  fixedDate: readonly string[];
+}
+
+/** How `6/7` is meant; null while nobody has said so. */
+export type DayOrder = 'day-first' | 'month-first' | null;
+
+export type ImportDateProblem =
+  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | 'unknown-star-name' | 'unknown-sign';
+
+/** What one cell says. A ten-day part has a first and a last day; every other day is both. */
+export type DateCell =
+  | { kind: 'empty' }
+  /** `year` is null where none is named. */
+  | { kind: 'day'; first: MonthDay; last: MonthDay; year: number | null }
+  | { kind: 'sign'; sign: NamedSign; offsetDays: number }
+  | { kind: 'problem'; problem: ImportDateProblem };
+
+/** A sign that a cell names, as the village knows it. */
+export type NamedSign =
+  { type: 'star'; markerKey: string; phenomenon: Phenomenon } | { type: 'other'; signKey: string };
+
+export interface ImportDateFacts {
+  words: ImportWords;
+  dayOrder: DayOrder;
+  /** The calendar's year: a day with another year belongs to another calendar, save for the end of a window. */
+  calendarYear: number;
+  /** Stars and figures by their names as `plainWords` writes them. */
+  markerKeyOf: ReadonlyMap<string, string>;
+  /** Other signs of the sky by their names, with a key that whoever asks understands. */
+  signKeyOf: ReadonlyMap<string, string>;
+}
+
+const ISO = /^(\d{4})-(\d{1,2})-(\d{1,2})$/u;
+const MONTH_DAY = /^(\d{2})-(\d{2})$/u;
+const DOTTED = /^(\d{1,2})\.\s*(\d{1,2})\.?(?:\s*(\d{4}))?$/u;
+const SLASHED = /^(\d{1,2})\/(\d{1,2})(?:\/(\d{4}))?$/u;
+const DAY_THEN_WORD = /^(\d{1,2})\.?\s+(\p{L}+)\.?(?:\s+(\d{4}))?$/u;
+const WORD_THEN_DAY = /^(\p{L}+)\.?\s+(\d{1,2})(?:,?\s+(\d{4}))?$/u;
+const TEN_DAYS_OF_YEAR = /^d\s?(\d{1,2})$/u;
+const OFFSET = /^(.*?)\s*([+\-−])\s*(\d{1,3})$/u;
+const TEN_DAY_PARTS = 3;
+const TEN_DAY_PARTS_OF_YEAR = 36;
+const ONLY_SLASH_MONTHS = 12;
+
+/**
+ * Reads one cell of a table as a day: `2027-06-14`, `06-14`, `14.6.`, `14/6`, `14 June`, `June 14`; as a ten-day part,
+ * `June 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign, `Pleiades first morning +7`. A month's
+ * name with 1, 2 or 3 behind it is always a ten-day part; the second of June is `2 June`.
+ *
+ * @returns what the cell says, or what is the matter with it; never throws
+ */
+export function dateCell(text: string, facts: ImportDateFacts): DateCell {
+  const words = plainWords(text);
+  if (words === '') return { kind: 'empty' };
+  return dayCell(withoutFixed(words, facts.words), facts) ?? signCell(words, facts);
+}
+
+/** Words as they are compared: composed, small, one space between, no article before. */
+export function plainWords(text: string): string {
+  return text.normalize('NFC').toLowerCase().replace(/\s+/gu, ' ').trim().replace(/^the /u, '');
+}
+
+function withoutFixed(words: string, { fixedDate }: ImportWords): string {
+  const prefix = fixedDate.map((each) => `${plainWords(each)}:`).find((each) => words.startsWith(each));
+  return prefix === undefined ? words : words.slice(prefix.length).trim();
+}
+
+function dayCell(
+  words: string,
+  { words: { months }, dayOrder, calendarYear }: ImportDateFacts,
+): DateCell | null {
+  const day = (month: string | number, dayOfMonth: string, year?: string): DateCell =>
+    oneDay(Number(month), Number(dayOfMonth), year === undefined ? null : Number(year), calendarYear);
+  const monthOf = (name: string) =>
+    months.findIndex((names) => names.some((each) => plainWords(each) === name)) + 1;
+
+  const iso = ISO.exec(words);
+  if (iso) return day(iso[2] ?? '', iso[3] ?? '', iso[1]);
+  const monthDay = MONTH_DAY.exec(words);
+  if (monthDay) return day(monthDay[1] ?? '', monthDay[2] ?? '');
+  const dotted = DOTTED.exec(words);
+  if (dotted) return day(dotted[2] ?? '', dotted[1] ?? '', dotted[3]);
+  const slashed = SLASHED.exec(words);
+  if (slashed) return slashedDay(slashed, dayOrder, day);
+  const tenDays = TEN_DAYS_OF_YEAR.exec(words);
+  if (tenDays) return tenDayPart(Number(tenDays[1]));
+  const dayFirst = DAY_THEN_WORD.exec(words);
+  if (dayFirst && monthOf(dayFirst[2] ?? '') > 0) {
+    return day(monthOf(dayFirst[2] ?? ''), dayFirst[1] ?? '', dayFirst[3]);
+  }
+  const monthFirst = WORD_THEN_DAY.exec(words);
+  const month = monthFirst ? monthOf(monthFirst[1] ?? '') : 0;
+  if (monthFirst && month > 0) {
+    const number = Number(monthFirst[2]);
+    if (number > TEN_DAY_PARTS || monthFirst[3] !== undefined)
+      return day(month, monthFirst[2] ?? '', monthFirst[3]);
+    return tenDayPart((month - 1) * TEN_DAY_PARTS + number);
+  }
+  // Digits alone, or nothing but digits and their marks, are no sign either.
+  return /^[\d\s./-]+$/u.test(words) ? { kind: 'problem', problem: 'date-not-read' } : null;
+}
+
+function slashedDay(
+  [, first = '', second = '', year]: RegExpExecArray,
+  dayOrder: DayOrder,
+  day: (month: string, dayOfMonth: string, year?: string) => DateCell,
+): DateCell {
+  if (Number(first) > ONLY_SLASH_MONTHS) return day(second, first, year);
+  if (Number(second) > ONLY_SLASH_MONTHS) return day(first, second, year);
+  // The same number twice is the same day both ways.
+  if (Number(first) === Number(second)) return day(first, second, year);
+  if (dayOrder === null) return { kind: 'problem', problem: 'which-first' };
+  return dayOrder === 'day-first' ? day(second, first, year) : day(first, second, year);
+}
+
+function oneDay(month: number, day: number, year: number | null, calendarYear: number): DateCell {
+  if (year !== null && year !== calendarYear && year !== calendarYear + 1) {
+    return { kind: 'problem', problem: 'other-year' };
+  }
+  // A day of every year has no 29 February.
+  const exists = month >= 1 && month <= 12 && day >= 1 && day <= daysInMonth(1, month);
+  if (!exists) return { kind: 'problem', problem: 'no-such-day' };
+  return { kind: 'day', first: { month, day }, last: { month, day }, year };
+}
+
+/** Three to a month: 1–10, 11–20 and the rest of it. */
+function tenDayPart(number: number): DateCell {
+  if (number < 1 || number > TEN_DAY_PARTS_OF_YEAR) return { kind: 'problem', problem: 'no-such-day' };
+  const month = Math.ceil(number / TEN_DAY_PARTS);
+  const part = (number - 1) % TEN_DAY_PARTS;
+  const lastDay = part === TEN_DAY_PARTS - 1 ? daysInMonth(1, month) : (part + 1) * 10;
+  return { kind: 'day', first: { month, day: part * 10 + 1 }, last: { month, day: lastDay }, year: null };
+}
+
+function signCell(
+  words: string,
+  { words: { phenomena }, markerKeyOf, signKeyOf }: ImportDateFacts,
+): DateCell {
+  const parts = OFFSET.exec(words);
+  const name = parts?.[1] ?? words;
+  const offsetDays = parts ? (parts[2] === '+' ? 1 : -1) * Number(parts[3]) : 0;
+  const signKey = signKeyOf.get(name);
+  if (signKey !== undefined) return { kind: 'sign', sign: { type: 'other', signKey }, offsetDays };
+  // The longest ending first: "first morning setting" is not "first morning" of something called so.
+  const endings = Object.entries(phenomena)
+    .flatMap(([phenomenon, names]) => names.map((each) => ({ phenomenon, ending: plainWords(each) })))
+    .sort((a, b) => b.ending.length - a.ending.length);
+  const found = endings.find(({ ending }) => name.endsWith(` ${ending}`) || name.endsWith(`,${ending}`));
+  if (!found) return { kind: 'problem', problem: 'unknown-sign' };
+  const star = plainWords(name.slice(0, -found.ending.length).replace(/[\s,:]+$/u, ''));
+  const markerKey = markerKeyOf.get(star);
+  if (markerKey === undefined) return { kind: 'problem', problem: 'unknown-star-name' };
+  const phenomenon = found.phenomenon as Phenomenon;
+  return { kind: 'sign', sign: { type: 'star', markerKey, phenomenon }, offsetDays };
+}

@@ -1,0 +1,43 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import {
+  importsEndpoints,
+  type FileImport,
+  type TableImport,
+  type TableInput,
+} from '#shared/contracts/imports.js';
+import { callApi } from '#src/lib/api-client.js';
+import { uploadToApi } from '#src/lib/api-upload.js';
+import { calendarKeys } from '#src/lib/calendar-queries.js';
+
+export interface FileSending {
+  file: File;
+  /** The same for everything that is sent of one chosen file: what came twice is brought in once. */
+  key: string;
+  dryRun: boolean;
+  signal: AbortSignal;
+}
+
+export function useFileImport(calendarId: string) {
+  const refresh = useRefresh(calendarId);
+  return useMutation({
+    mutationFn: ({ file, key, dryRun, signal }: FileSending): Promise<FileImport> =>
+      uploadToApi(importsEndpoints.file, { params: { calendarId }, body: { key, dryRun }, file, signal }),
+    onSettled: refresh,
+  });
+}
+
+export function useTableImport(calendarId: string) {
+  const refresh = useRefresh(calendarId);
+  return useMutation({
+    mutationFn: ({ signal, ...body }: TableInput & { signal: AbortSignal }): Promise<TableImport> =>
+      callApi(importsEndpoints.table, { params: { calendarId }, body, signal }),
+    onSettled: refresh,
+  });
+}
+
+/** Also after a refusal: it may be one because something changed meanwhile. */
+function useRefresh(calendarId: string) {
+  const client = useQueryClient();
+  return (_answer: unknown, _problem: unknown, { dryRun }: { dryRun: boolean }) =>
+    dryRun ? undefined : client.invalidateQueries({ queryKey: calendarKeys.one(calendarId) });
+}

@@ -1,0 +1,108 @@
+import { ListChecks } from 'lucide-react';
+import { useState } from 'react';
+import { useTranslation } from 'react-i18next';
+import type { Calendar } from '#shared/contracts/calendars.js';
+import type { TableInput } from '#shared/contracts/imports.js';
+import { keep, readKept } from '#src/lib/device-storage.js';
+import { Button } from '#src/ui/button.js';
+import { useTableImport } from '../api/imports-api.js';
+import {
+  guessColumns,
+  keptMatching,
+  matchAnew,
+  matchedLines,
+  type Matching,
+} from '../model/match-columns.js';
+import type { SavedTable } from '../model/read-table.js';
+import { isExample } from '../model/template.js';
+import { useImportColumnWords } from '../model/use-import-words.js';
+import { useStoppable } from '../model/use-stoppable.js';
+import { LongWork } from './long-work.js';
+import { MatchFields } from './match-fields.js';
+import { ReadLines } from './read-lines.js';
+
+interface TableImportStepsProps {
+  calendar: Calendar;
+  /** The same for all that is sent of this table. */
+  importKey: string;
+  table: SavedTable;
+  onDone: (added: number) => void;
+}
+
+/** A table: which column is what, what each line becomes, then bringing all of them in. */
+export function TableImportSteps({ calendar, importKey, table, onDone }: TableImportStepsProps) {
+  const { t } = useTranslation('imports');
+  const { titlesOf, examples } = useImportColumnWords();
+  const keptAt = `import-columns.${table.titles.join('|')}`;
+  const [matching, setMatching] = useState<Matching>(
+    () => keptMatching(readKept(keptAt), table.titles) ?? guessColumns(table.titles, titlesOf),
+  );
+  const [dayOrder, setDayOrder] = useState<TableInput['dayOrder']>(null);
+  const look = useTableImport(calendar.id);
+  const bring = useTableImport(calendar.id);
+  const work = useStoppable();
+
+  const all = matchedLines(table, matching);
+  const lines = all.filter((line) => !isExample(line, examples));
+  const send = { key: importKey, dayOrder, lines };
+  const changed = (change: () => void) => {
+    change();
+    look.reset();
+    bring.reset();
+  };
+  return (
+    <div className="mt-4 grid gap-4">
+      <MatchFields
+        table={table}
+        matching={matching}
+        dayOrder={dayOrder}
+        onMatch={(index, column) => {
+          changed(() => {
+            const next = matchAnew(matching, index, column);
+            setMatching(next);
+            keep(keptAt, next);
+          });
+        }}
+        onOrder={(order) => {
+          changed(() => {
+            setDayOrder(order);
+          });
+        }}
+      />
+      {all.length > lines.length && <p>{t('match.examples', { count: all.length - lines.length })}</p>}
+      <Button
+        icon={<ListChecks aria-hidden size={20} />}
+        busy={look.isPending}
+        closedBecause={lines.length === 0 ? t('bring.noLines') : undefined}
+        onClick={() => {
+          look.mutate({ ...send, dryRun: true, signal: work.begin() });
+        }}
+      >
+        {t('match.look')}
+      </Button>
+      <LongWork
+        isPending={look.isPending || bring.isPending}
+        problem={bring.error ?? look.error}
+        doing={t(bring.isPending ? 'bring.sending' : 'bring.looking')}
+        work={work}
+      />
+      {look.data && (
+        <ReadLines
+          lines={look.data.lines}
+          year={calendar.year}
+          isBusy={bring.isPending}
+          onBring={() => {
+            bring.mutate(
+              { ...send, dryRun: false, signal: work.begin() },
+              {
+                onSuccess: ({ added }) => {
+                  onDone(added);
+                },
+              },
+            );
+          }}
+        />
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,77 @@
+import { readFile } from 'node:fs/promises';
+import type { Calendar } from '#shared/contracts/calendars.js';
+import { expect, test } from '#tests/support/journey.js';
+import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+
+/*
+ * The officer brings last year's spreadsheet in on a phone: a column is matched by hand, a line is put right, the network
+ * goes in the middle, and nothing comes twice. Then a calendar that was taken along whole comes back.
+ */
+test.use({ viewport: { width: 320, height: 740 }, hasTouch: true, expectedNoise: [/ERR_FAILED|409/u] });
+
+test('the officer brings a table in, line by line looked at, and a calendar’s own file', async ({ page }) => {
+  await signIn(page, 'officer');
+  const { items } = (await (await page.request.get('/api/calendars')).json()) as { items: Calendar[] };
+  const published = items.find((calendar) => calendar.published !== null);
+  await page.goto('/calendars');
+  await page.getByRole('button', { name: /^Begin 2028 from this one/u }).click();
+  await page.getByRole('dialog').getByRole('button', { name: 'Begin 2028' }).click();
+  await page.getByRole('link', { name: 'Open the draft of 2028' }).click();
+  await page.getByRole('link', { name: 'Take along, bring in' }).click();
+  const bring = page.getByRole('region', { name: 'Bring in' });
+  const [template] = await Promise.all([
+    page.waitForEvent('download'),
+    bring.getByRole('button', { name: 'An empty table to fill in' }).click(),
+  ]);
+  const [titles = '', ...examples] = (await readFile(await template.path(), 'utf8')).trim().split('\r\n');
+  expect(titles).toContain('name for the office');
+
+  const choose = (name: string, text: string) =>
+    bring.getByLabel('File to bring in').setInputFiles({ name, mimeType: '', buffer: Buffer.from(text) });
+  const table = (day: string) =>
+    ['Work;type;When;days', `Bind sheaves;farm;Pleiades, first morning;${day}`, 'Sweep;household;6/7;'].join(
+      '\n',
+    );
+  await choose('last-year.csv', table('soon'));
+  await bring.getByLabel('“When”').selectOption({ label: 'sign or day' });
+  await bring.getByLabel('“days”').selectOption({ label: 'days from the sign: best from' });
+  await bring.getByRole('button', { name: 'Look at every line' }).click();
+  await expect(bring.getByText('2 lines need another look.')).toBeVisible();
+  await expect(bring.getByText('days from the sign: best from: Write a whole number of days.')).toBeVisible();
+  await expectAccessible(page);
+  await expectNoSidewaysScroll(page);
+
+  await choose('last-year.csv', table('7'));
+  // The choice was kept for these titles.
+  await expect(bring.getByLabel('“When”')).toHaveValue('when');
+  await bring.getByLabel('Days such as 6/7').selectOption({ label: 'The day comes first: 6 July' });
+  await bring.getByRole('button', { name: 'Look at every line' }).click();
+  await expect(bring.getByText('All 2 lines are right. Nothing is kept yet.')).toBeVisible();
+  await page.route('**/imports/table', async (route) => {
+    // The server does it, and the answer never comes.
+    await route.fetch();
+    await route.abort();
+  });
+  await bring.getByRole('button', { name: 'Bring 2 entries in' }).click();
+  await expect(bring.getByText(/There is no network just now/u)).toBeVisible();
+  await page.unroute('**/imports/table');
+  await bring.getByRole('button', { name: 'Bring 2 entries in' }).click();
+  await expect(bring.getByText('2 entries were brought in. They are drafts.')).toBeVisible();
+  await expectAccessible(page);
+  await bring.getByRole('link', { name: 'Open the draft' }).click();
+  await expect(page.getByText('Bind sheaves')).toHaveCount(1);
+
+  await page.goBack();
+  await choose('filled.csv', [titles, ...examples, 'Ŋɔ́,Glean,farm,,,,,,1 August'].join('\r\n'));
+  await expect(bring.getByText('2 example lines are passed over.')).toBeVisible();
+
+  const version = `/api/calendars/${published?.id ?? ''}/versions/${String(published?.published?.number)}`;
+  const file = await (await page.request.get(`${version}/calendar.json`)).text();
+  await choose('calendar.json', file.replace('"farm"', '"household"'));
+  await expect(bring.getByText(/a checksum does not fit/u)).toBeVisible();
+  await choose('calendar.json', file);
+  await expect(bring.getByText(/^\d+ entries would come in\.$/u)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await bring.getByRole('button', { name: /^Bring \d+ entries in$/u }).click();
+  await expect(bring.getByText(/^\d+ entries were brought in/u)).toBeVisible();
+});
