@@ -18,10 +18,10 @@ import { ActualDates1798500000000 } from './1798500000000-actual-dates.js';
 import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-without-address.js';
 import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
+import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.js';
 import { Signs1799000000000 } from './1799000000000-signs.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
-import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -45,8 +45,8 @@ export const MIGRATIONS = [
   PeopleWithoutAddress1798510000000,
   CalendarFeeds1798600000000,
   Rollovers1798800000000,
+  CalendarImports1798900000000,
   Signs1799000000000,
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
-  CalendarImports1798900000000,
 ];
