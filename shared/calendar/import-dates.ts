@@ -16,7 +16,7 @@ export interface ImportWords {
 export type DayOrder = 'day-first' | 'month-first' | null;
 
 export type ImportDateProblem =
-  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | 'unknown-star-name' | 'unknown-sign';
+  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | 'unknown-star-name' | 'unknown-sign-words';
 
 /** What one cell says. A ten-day part has a first and a last day; every other day is both. */
 export type DateCell =
@@ -157,7 +157,7 @@ function signCell(
     .flatMap(([phenomenon, names]) => names.map((each) => ({ phenomenon, ending: plainWords(each) })))
     .sort((a, b) => b.ending.length - a.ending.length);
   const found = endings.find(({ ending }) => name.endsWith(` ${ending}`) || name.endsWith(`,${ending}`));
-  if (!found) return { kind: 'problem', problem: 'unknown-sign' };
+  if (!found) return { kind: 'problem', problem: 'unknown-sign-words' };
   const star = plainWords(name.slice(0, -found.ending.length).replace(/[\s,:]+$/u, ''));
   const markerKey = markerKeyOf.get(star);
   if (markerKey === undefined) return { kind: 'problem', problem: 'unknown-star-name' };

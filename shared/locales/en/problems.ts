@@ -240,7 +240,7 @@ export const texts = {
     'which-first': 'Say above whether the day or the month comes first in days such as 6/7.',
     'unknown-star-name':
       'The village knows no star or figure of this name. Use its name from the list of stars.',
-    'unknown-sign':
+    'unknown-sign-words':
       'No sign goes by these words. Name a star with its day, such as “Pleiades, first morning”, or write a day of the year.',
     'date-missing': 'This line says no day. Name a sign, or write from when the best days are.',
     'mixed-dates': 'This line names two signs. Let all its days go by one of them.',

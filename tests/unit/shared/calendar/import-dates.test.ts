@@ -86,8 +86,8 @@ describe('a cell that says when', () => {
 
   it('says what is the matter with the rest', () => {
     expect(read('Weaver star, first dawn')).toEqual(problem('unknown-star-name'));
-    expect(read('when the fig has leaves')).toEqual(problem('unknown-sign'));
-    expect(read('Pleiades')).toEqual(problem('unknown-sign'));
+    expect(read('when the fig has leaves')).toEqual(problem('unknown-sign-words'));
+    expect(read('Pleiades')).toEqual(problem('unknown-sign-words'));
     for (const text of ['14', '1.2.3.4', '20270614']) expect(read(text)).toEqual(problem('date-not-read'));
   });
 });

@@ -75,7 +75,7 @@ describe('the days of a line', () => {
     expect(two.problems).toEqual([{ column: 'bestTo', problem: 'mixed-dates' }]);
     expect(line({ bestFrom: '31.4.', bestTo: 'soon' }).problems).toEqual([
       { column: 'bestFrom', problem: 'no-such-day' },
-      { column: 'bestTo', problem: 'unknown-sign' },
+      { column: 'bestTo', problem: 'unknown-sign-words' },
     ]);
   });
 });
