@@ -37,12 +37,17 @@ export function mayUse(
   kind: EntryKind | null,
   today: string,
 ): boolean {
-  if (consents.length === 0) return (kind === 'belief' ? OF_A_BELIEF : AMONG_ITS_OWN).includes(use);
+  if (consents.length === 0) return amongItsOwn(kind).includes(use);
   return consents.every((consent) => {
     const state = stateOn(consent, today);
     if (isOpen(state) && (use === 'keep' || use === 'show')) return true;
     return isYes(state) && consent.uses.includes(use);
   });
+}
+
+/** What a thing may be used for while nobody was asked about it. */
+export function amongItsOwn(kind: EntryKind | null): readonly ConsentUse[] {
+  return kind === 'belief' ? OF_A_BELIEF : AMONG_ITS_OWN;
 }
 
 export function stateOn({ state, until }: ConsentFact, today: string): ConsentState {

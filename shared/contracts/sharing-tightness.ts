@@ -51,3 +51,30 @@ function spanOf({ from, to }: TellingSeason): [number, number] {
   const slot = ({ month, day }: TellingSeason['from']) => (month - 1) * SLOTS_PER_MONTH + day - 1;
   return [slot(from), (slot(to) - slot(from) + DAY_SLOTS) % DAY_SLOTS];
 }
+
+/**
+ * What is left of `mine` where `other` must hold as well: nobody sees more by it than by either. Where the two name other
+ * groups or seasons that do not lie in one another, it is sealed until somebody says it anew.
+ */
+export function tightest(mine: Sharing, other: Sharing): Sharing {
+  if (isTighterOrSame(mine, other)) return other;
+  const [own, theirs] = [mine.details, other.details];
+  const stricter = rankOf(mine.level) >= rankOf(other.level) ? mine : other;
+  const season = seasonWithin(own.tellingSeason, theirs.tellingSeason)
+    ? own.tellingSeason
+    : theirs.tellingSeason;
+  const clash =
+    (mine.level === 'group' && other.level === 'group' && own.groupId !== theirs.groupId) ||
+    !seasonWithin(season, own.tellingSeason);
+  return {
+    level: clash ? 'sealed' : stricter.level,
+    details: {
+      ...own,
+      groupId: clash ? null : stricter.details.groupId,
+      successorId: own.successorId === theirs.successorId ? own.successorId : null,
+      tellingSeason: seasonWithin(season, own.tellingSeason) ? season : own.tellingSeason,
+      trace: own.trace === 'none' || theirs.trace === 'none' ? 'none' : 'blank',
+      naming: namingRank(own) >= namingRank(theirs) ? own.naming : theirs.naming,
+    },
+  };
+}

@@ -15,8 +15,9 @@ import {
   submit,
   type Village,
 } from '#tests/support/calendar-api.js';
-import { addConsent } from '#tests/support/consent-api.js';
-import { details } from '#tests/support/sharing-api.js';
+import type { Consent, ConsentUse, ItemConsents } from '#shared/contracts/consents.js';
+import { addConsent, consentsPath } from '#tests/support/consent-api.js';
+import { details, sharingPath } from '#tests/support/sharing-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
 
 let api: TestApi;
@@ -225,6 +226,81 @@ describe('what goes along into the next year', () => {
     for (const id of [calendar.id, next, after]) expect(await entriesOf(village.officer, id)).toHaveLength(1);
     await village.elder.post(`${item}/withdrawal`, { leavesTrace: false, askedById: null }).expect(204);
     for (const id of [calendar.id, next, after]) expect(await entriesOf(village.elder, id)).toEqual([]);
+  });
+});
+
+describe('what is said about an entry later', () => {
+  const levelsOf = async (calendarIds: readonly string[]) =>
+    Promise.all(calendarIds.map(async (id) => (await entriesOf(village.elder, id))[0]?.content.sharingLevel));
+  const share = async (itemId: string, level: 'elders' | 'village' | 'open') => {
+    const path = sharingPath(village.elder, 'entry', itemId);
+    const { version } = (await village.elder.get(path).expect(200)).body as { version: number };
+    return village.elder.put(path, { sharing: { level, ...details() }, version }).expect(200);
+  };
+
+  it('holds for every year where a level is made tighter, from whichever year, also by an edit', async () => {
+    const next = await rolledOver();
+    const after = await rolledOver(next);
+    const years = [calendar.id, next, after];
+    const [middle] = await entriesOf(village.officer, next);
+    await share(middle?.id ?? '', 'village');
+    expect(await levelsOf(years)).toEqual(['village', 'village', 'village']);
+    const [last] = await entriesOf(village.officer, after);
+    if (!last) throw new Error('no entry');
+    const content = { ...last.content, sharingLevel: 'elders' as const };
+    const path = `/api/calendars/${after}/entries/${last.id}`;
+    await village.officer.put(path, { content, version: last.version }).expect(200);
+    for (const id of years) expect(await entriesOf(village.officer, id)).toEqual([]);
+    expect(await levelsOf(years)).toEqual(['elders', 'elders', 'elders']);
+  });
+
+  it('holds for the one year where giver and steward make it wider, also after the next edit of another', async () => {
+    await share(entry.id, 'village');
+    const next = await rolledOver();
+    const [rolled] = await entriesOf(village.officer, next);
+    await share(rolled?.id ?? '', 'open');
+    await village.steward
+      .post(`${sharingPath(village.steward, 'entry', rolled?.id ?? '')}/agreement`)
+      .expect(200);
+    const [here] = await entriesOf(village.officer, calendar.id);
+    const content = { ...here?.content, crop: 'sorghum' };
+    await village.officer
+      .put(`/api/calendars/${calendar.id}/entries/${entry.id}`, { content, version: here?.version })
+      .expect(200);
+    expect(await levelsOf([calendar.id, next])).toEqual(['village', 'open']);
+  });
+
+  it('holds for every year where a consent is taken back or narrowed, and for one where it says more', async () => {
+    const giverId = village.elder.personId;
+    const { id } = await addConsent(village.elder, 'entry', entry.id, {
+      uses: ['keep', 'show', 'print'],
+      giverId,
+    });
+    const next = await rolledOver();
+    const usesOf = async (calendarId: string) => {
+      const [there] = await entriesOf(village.elder, calendarId);
+      const path = `/api/communities/${village.elder.communityId}/items/entry/${there?.id ?? ''}/consents`;
+      const { items } = (await village.elder.get(path).expect(200)).body as ItemConsents;
+      return items.map(({ uses }) => uses);
+    };
+    const path = consentsPath(village.elder, id);
+    const change = async (uses: ConsentUse[]) => {
+      const { content, version } = (await village.elder.get(path).expect(200)).body as Consent;
+      await village.elder.put(path, { content: { ...content, uses }, version }).expect(200);
+    };
+    await change(['keep', 'show', 'print', 'radio']);
+    expect(await usesOf(next)).toEqual([['keep', 'show', 'print']]);
+    await change(['keep', 'show']);
+    expect(await usesOf(next)).toEqual([['keep', 'show']]);
+    const { version } = (await village.elder.get(path).expect(200)).body as Consent;
+    await village.elder.post(`${path}/withdrawal`, { version }).expect(200);
+    expect(await entriesOf(village.officer, next)).toEqual([]);
+  });
+
+  it('is a no for every year where it is the first word about it', async () => {
+    const next = await rolledOver();
+    await addConsent(village.elder, 'entry', entry.id, { uses: ['keep'], giverId: village.elder.personId });
+    expect(await entriesOf(village.officer, next)).toEqual([]);
   });
 });
 

@@ -8,6 +8,7 @@ import { isKept, maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing } from '../../policy/sharing.repository.js';
 import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import type { Viewer } from '../../policy/viewer.js';
+import { tightenOtherYears } from '../rollovers/tighter-years.service.js';
 import { expectKnownPeople } from '../sharing/known-people.service.js';
 
 /** How an entry is shared, as its content says it. */
@@ -61,4 +62,5 @@ export async function shareChangedEntry(
   if (!isTighterOrSame(row, after)) throw invalidField('content.sharingLevel', 'wider-needs-two');
   await expectKnownPeople(manager, actor, after.details, content.giverId ?? null, 'content.');
   await manager.update(ItemSharingEntity, { itemType: 'entry', itemId: entryId }, { ...after, giverId });
+  await tightenOtherYears(manager, { itemType: 'entry', itemId: entryId }, row, after);
 }

@@ -34,6 +34,7 @@ import {
   mayOf,
   withProof,
 } from './consent-rules.js';
+import { holdInOtherYears } from './other-years.service.js';
 import { consentThings, type ConsentThing, type ThingRef } from './consent-things.service.js';
 import { toColumns, toConsent, toConsentLine, type ConsentFacts } from './consents.mapper.js';
 
@@ -214,6 +215,7 @@ export class ConsentsService {
   ): Promise<void> {
     await settleShownUntil(manager, row.itemType, row.itemId);
     if (row.uses.length > 0) await narrowNaming(manager, row, row.details.naming);
+    await holdInOtherYears(manager, row);
     await recordConsent(manager, this.clock.now(), actor, action, row, thing.shared.level);
   }
 

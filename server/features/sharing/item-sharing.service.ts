@@ -1,6 +1,5 @@
 import type { ItemSharing, SharedItemType, SharingChange, SharingInput } from '#shared/contracts/sharing.js';
 import type { DataSource, EntityManager } from 'typeorm';
-import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { GroupMemberEntity } from '../../db/entities/group-member.entity.js';
 import { ItemSharingEntity, type AskedSharing } from '../../db/entities/item-sharing.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -16,6 +15,7 @@ import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightne
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { sayItInTheEntry, tightenOtherYears } from '../rollovers/tighter-years.service.js';
 import { isWithinSight } from './within-sight.service.js';
 import { toItemSharing } from './sharing.mapper.js';
 
@@ -63,7 +63,9 @@ export class ItemSharingService {
       await expectKnownPeople(manager, actor, row, sharing);
       const after = asSharing(sharing);
       if (isTighterOrSame(row, after)) {
+        const before = { level: row.level, details: row.details };
         await this.apply(manager, row, after);
+        await tightenOtherYears(manager, row, before, after);
         await this.record(manager, actor, row, 'sharing-tightened', { to: after.level });
         return;
       }
@@ -124,10 +126,7 @@ export class ItemSharingService {
   /** An entry's own words about its level follow, so that editor and policy say the same. */
   private async apply(manager: EntityManager, row: ItemSharingEntity, after: Sharing): Promise<void> {
     await this.update(manager, row, { ...after, asked: null });
-    if (row.itemType !== 'entry') return;
-    const entry = await manager.findOneByOrFail(EntryEntity, { id: row.itemId });
-    const content = { ...entry.content, sharingLevel: after.level, sharing: after.details };
-    await manager.update(EntryEntity, { id: row.itemId }, { content });
+    if (row.itemType === 'entry') await sayItInTheEntry(manager, row.itemId, after);
   }
 
   private async update(

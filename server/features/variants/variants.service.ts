@@ -28,6 +28,7 @@ import { lockOpenDraft, readDraft, recordContribution } from '../calendars/draft
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { tightenOtherYears } from '../rollovers/tighter-years.service.js';
 import { draftVariants } from './draft-variants.service.js';
 import { toVariant } from './variants.mapper.js';
 
@@ -173,6 +174,7 @@ export class VariantsService {
       { itemType: 'variant', itemId: variantId },
       { ...after, giverId },
     );
+    await tightenOtherYears(manager, { itemType: 'variant', itemId: variantId }, row, after);
   }
 
   private async expectFits(

@@ -153,6 +153,14 @@ describe('a lead in another year', () => {
     expect(leadForAnotherYear({ type: 'marker-as-seen', ...star, seen }, ids)).toEqual({
       ...{ type: 'marker-as-seen', ...star, seen: null },
     });
-    expect(leadForAnotherYear(SOWING, ids)).toBe(SOWING);
+    const usual = { from: { month: 5, day: 1 }, to: { month: 5, day: 9 } };
+    const asTheyAre: EntryLead[] = [
+      SOWING,
+      { type: 'marker', ...star },
+      { type: 'sky', spec: { kind: 'moon-phase', event: 'full' }, occurrence: 7 },
+      { type: 'nature-sign', name: 'the hoopoe', usual, source: 'the village' },
+    ];
+    for (const lead of asTheyAre) expect(leadForAnotherYear(lead, ids)).toBe(lead);
+    expect(leadForAnotherYear(planned('gone'), ids)).toEqual(planned('gone'));
   });
 });

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { isTighterOrSame, type Sharing } from '#shared/contracts/sharing-tightness.js';
+import { isTighterOrSame, tightest, type Sharing } from '#shared/contracts/sharing-tightness.js';
 import {
   PLAIN_DETAILS,
   SHARING_LEVELS,
@@ -61,5 +61,34 @@ describe('what may hold at once', () => {
     ['a successor who goes', at('sealed', { successorId: 'heir' }), at('sealed'), true],
   ])('%s', (_, before, after, expected) => {
     expect(isTighterOrSame(before, after)).toBe(expected);
+  });
+});
+
+describe('what holds where two sharings must', () => {
+  const some = SHARING_LEVELS.flatMap((level) => [
+    at(level, { groupId: level === 'group' ? 'a' : null }),
+    at(level, { groupId: level === 'group' ? 'b' : null, naming: 'role', successorId: 'heir' }),
+    at(level, { groupId: level === 'group' ? 'a' : null, tellingSeason: season(6, 8), trace: 'none' }),
+    at(level, { groupId: level === 'group' ? 'a' : null, tellingSeason: season(6, 7) }),
+  ]);
+
+  it('shows nobody more than either of them', () => {
+    for (const mine of some) {
+      for (const other of some) {
+        const both = tightest(mine, other);
+        expect([mine, other].every((each) => isTighterOrSame(each, both))).toBe(true);
+      }
+    }
+  });
+
+  it('takes the tighter of the two as it is, and seals what names other groups or seasons', () => {
+    expect(tightest(at('village'), at('elders'))).toEqual(at('elders'));
+    expect(tightest(at('elders'), at('village')).level).toBe('elders');
+    expect(tightest(at('group', { groupId: 'a' }), at('group', { groupId: 'b' })).level).toBe('sealed');
+    const [summer, winter] = [
+      at('village', { tellingSeason: season(6, 8) }),
+      at('village', { tellingSeason: season(11, 2) }),
+    ];
+    expect(tightest(summer, winter).level).toBe('sealed');
   });
 });
