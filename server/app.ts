@@ -289,13 +289,14 @@ export function createApp(options: AppOptions): App {
   const waiting = new WaitingService(versions, answers, ownAnswers);
   const actualDays = new ActualDaysService(dataSource, clock);
   actualDaysRoutes(mount, actualDays);
-  const today = { places, calendars, contents, coming, waiting, consents, actualDays, clock };
+  const afterDeath = new AfterDeathService(dataSource, clock, withdrawals);
+  const today = { places, calendars, contents, coming, waiting, consents, afterDeath, actualDays, clock };
   todayRoutes(mount, new TodayService(today));
   const letters = new LettersService(dataSource, clock, config.sessionSecret, options.mailer !== null);
   lettersRoutes(router, mount, letters, new LetterChoicesService(dataSource, clock, letters.on));
   const looks = new LookService(places, new LookSeasonService(skyYears), clock);
   lookRoutes(mount, looks, new LookCardService(looks));
-  afterDeathRoutes(mount, new AfterDeathService(dataSource, clock, withdrawals));
+  afterDeathRoutes(mount, afterDeath);
   withdrawalsRoutes(mount, withdrawals, new ItemStatesService(dataSource, clock));
   const operator = { hosting: config.hosting, sendsLetters: options.mailer !== null };
   privacyRoutes(

@@ -186,7 +186,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listCommunities: 'names villages',
   readCommunity: 'is the village’s settings',
   listPeople: 'names people',
-  readAfterDeath: 'is a day and numbers',
+  readAfterDeath: 'is a day, numbers, and the names that a giver left something to',
   listPlaces: 'is places and their skylines',
   readPlace: 'is one place and its skyline',
   findTimeZone: 'is a name of a zone',

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { id, isoDate } from './common.js';
+import { id, isoDate, line } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 
 const count = z.number().int().min(0);
@@ -10,6 +10,8 @@ export const afterDeath = z.strictObject({
   diedOn: isoDate.nullable(),
   /** How many things are to stay, be told to fewer, pass to somebody, or be removed. */
   chosen: z.strictObject({ keep: count, tighten: count, passTo: count, remove: count }),
+  /** As they were written down: to whom something is to pass, where nobody of the village is called so, or several are. */
+  openHeirs: z.array(z.string()),
   /** Noted and nothing was removed: it can be undone. */
   mayUndo: z.boolean(),
 });
@@ -21,6 +23,10 @@ export const deathInput = z.strictObject({
   removesForGood: z.boolean(),
 });
 export type DeathInput = z.infer<typeof deathInput>;
+
+/** Who is meant by a name that fits nobody. */
+export const heirInput = z.strictObject({ name: line(120, 1), personId: id });
+export type HeirInput = z.infer<typeof heirInput>;
 
 const params = z.strictObject({ communityId: id, personId: id });
 const path = '/api/communities/:communityId/people/:personId/death';
@@ -43,6 +49,16 @@ export const afterDeathEndpoints = {
     access: member('community', 'steward'),
     params,
     body: deathInput,
+    response: afterDeath,
+  }),
+  nameHeir: defineEndpoint({
+    id: 'nameHeir',
+    method: 'POST',
+    path: `${path}/heirs`,
+    summary: 'Say who is meant by the name to whom something is to pass, and pass it on',
+    access: member('community', 'steward'),
+    params,
+    body: heirInput,
     response: afterDeath,
   }),
   undo: defineEndpoint({

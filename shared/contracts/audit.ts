@@ -10,6 +10,7 @@ export const AUDIT_ACTIONS = [
   'membership-ended',
   'death-noted',
   'death-undone',
+  'heir-named',
   'password-set',
   'devices-signed-out',
   'helping-began',

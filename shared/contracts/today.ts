@@ -94,6 +94,8 @@ export const today = z.strictObject({
   waiting: z.array(waitingItem),
   /** Consents that this person is to ask for again, or is asked about again; without what they are about. */
   consentsDue: z.number().int(),
+  /** For stewards: of how many people who died something waits to be passed on. */
+  heirsOpen: z.number().int(),
 });
 export type Today = z.infer<typeof today>;
 

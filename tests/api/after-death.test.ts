@@ -2,6 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { AfterDeath } from '#shared/contracts/after-death.js';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { ConsentContent } from '#shared/contracts/consents.js';
+import type { Today } from '#shared/contracts/today.js';
 import type { ItemSharing } from '#shared/contracts/sharing.js';
 import { openTestApi, type TestApi } from '#tests/support/api.js';
 import {
@@ -99,9 +100,24 @@ describe('what was chosen for after a death', () => {
     await village.officer.get(path()).expect(403);
   });
 
-  it('does not pass to somebody whom nobody here is called', async () => {
+  it('waits where nobody here is called so, until the steward says who is meant; undone, it goes back', async () => {
     const passed = await given({ afterDeath: 'pass-to', passTo: 'My niece' });
-    await note().expect(200);
+    const heir = (personId: string, name = 'My niece') =>
+      village.steward.post(`${path()}/heirs`, { name, personId });
+    expect((await heir(village.elder3.personId)).status).toBe(404);
+    expect((await note().expect(200)).body).toMatchObject({ openHeirs: ['My niece'] });
+    expect(await sharingOf(passed)).toMatchObject({ giverId: village.elder.personId });
+    const waits = async () =>
+      ((await village.steward.get(`/api/communities/${village.steward.communityId}/today`)).body as Today)
+        .heirsOpen;
+    expect(await waits()).toBe(1);
+    expect((await heir(village.elder3.personId, 'My nephew')).status).toBe(404);
+    expect((await heir(village.elder.personId)).status).toBe(422);
+    expect((await heir((await api.signIn('officer2')).personId)).status).toBe(422);
+    expect((await heir(village.elder3.personId).expect(200)).body).toMatchObject({ openHeirs: [] });
+    expect(await sharingOf(passed)).toMatchObject({ giverId: village.elder3.personId });
+    expect(await waits()).toBe(0);
+    await village.steward.delete(path()).expect(200);
     expect(await sharingOf(passed)).toMatchObject({ giverId: village.elder.personId });
   });
 });

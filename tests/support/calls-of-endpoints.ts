@@ -181,6 +181,7 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     updateGroup: () => ({ name: 'Menders', memberIds: [village.elderId], ...stale }),
     // Nobody of these gave it or is asked for it: the thing stays.
     withdrawItem: () => ({ leavesTrace: true, askedById: village.place.id }),
+    nameHeir: () => ({ name: 'Nobody', personId: village.elderId }),
     noteDeath: () => ({ diedOn: '2026-11-01', removesForGood: false }),
     pauseItem: () => ({ askedById: village.place.id }),
     removeSound: () => ({ askedById: village.place.id }),

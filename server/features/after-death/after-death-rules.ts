@@ -13,19 +13,21 @@ export function tightened({ level, details, giverId }: SharedAs): SharedAs {
   };
 }
 
-/** Whoever it passes to, where exactly one of the village's people is called so; else it stays for the steward to see to. */
-export function passedTo(
-  before: SharedAs,
+/** Whoever is meant by a name, where exactly one of the village's people is called so; else null: the steward chooses. */
+export function heirOf(
   passTo: string,
   members: readonly Pick<MembershipEntity, 'personId' | 'person'>[],
-): SharedAs {
+): string | null {
   const called = members.filter(({ person }) => person.displayName === passTo.trim());
-  const [heir] = called;
-  if (heir === undefined || called.length > 1) return before;
+  return called.length === 1 ? (called[0]?.personId ?? null) : null;
+}
+
+/** Given by the heir from now on, who is no successor of their own. */
+export function passedTo(before: SharedAs, heirId: string): SharedAs {
   const { successorId } = before.details;
   return {
     ...before,
-    details: { ...before.details, successorId: successorId === heir.personId ? null : successorId },
-    giverId: heir.personId,
+    details: { ...before.details, successorId: successorId === heirId ? null : successorId },
+    giverId: heirId,
   };
 }

@@ -7,5 +7,8 @@ export function afterDeathRoutes(mount: Mount, deaths: AfterDeathService): void 
   mount.forMember(afterDeathEndpoints.note, ({ params, body }, actor) =>
     deaths.note(actor, params.personId, body),
   );
+  mount.forMember(afterDeathEndpoints.nameHeir, ({ params, body }, actor) =>
+    deaths.nameHeir(actor, params.personId, body),
+  );
   mount.forMember(afterDeathEndpoints.undo, ({ params }, actor) => deaths.undo(actor, params.personId));
 }

@@ -1,4 +1,4 @@
-import type { AfterDeath, DeathInput } from '#shared/contracts/after-death.js';
+import type { AfterDeath, DeathInput, HeirInput } from '#shared/contracts/after-death.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { In, type DataSource, type EntityManager } from 'typeorm';
 import { ConsentEntity } from '../../db/entities/consent.entity.js';
@@ -7,14 +7,14 @@ import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { ItemSharingEntity } from '../../db/entities/item-sharing.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
-import type { Actor } from '../../http/actor.js';
+import { hasRole, type Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { lockSharing } from '../../policy/sharing.repository.js';
 import { villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { WithdrawalsService } from '../withdrawals/withdrawals.service.js';
-import { passedTo, tightened } from './after-death-rules.js';
+import { heirOf, passedTo, tightened } from './after-death-rules.js';
 
 /**
  * What somebody chose for after their death, in each consent that they gave by themselves: keep, tell to fewer, pass on,
@@ -64,6 +64,40 @@ export class AfterDeathService {
     return this.describe(this.dataSource.manager, actor, personId);
   }
 
+  /** What waits for this name passes to whom the steward says; its giver is no more there to be asked. */
+  async nameHeir(actor: Actor, personId: string, { name, personId: heirId }: HeirInput): Promise<AfterDeath> {
+    const { communityId } = actor;
+    return inTransaction(this.dataSource, async (manager) => {
+      await expectOfVillage(manager, actor, personId, { mode: 'pessimistic_write' });
+      const death = await manager.findOneBy(DeathEntity, { personId, communityId });
+      const waiting = (await waitingHeirs(manager, actor, personId)).filter(({ passTo }) => passTo === name);
+      if (death === null || waiting.length === 0) throw notFound();
+      const isMember = await manager.existsBy(MembershipEntity, { communityId, personId: heirId });
+      if (!isMember || heirId === personId) throw invalidField('personId', 'not-of-this-village');
+      for (const { row } of waiting) {
+        const before = sharedAs(row);
+        const after = passedTo(before, heirId);
+        await share(manager, row, after);
+        death.done = [...death.done, { itemType: row.itemType, itemId: row.itemId, before, after }];
+      }
+      await manager.update(DeathEntity, { personId, communityId }, { done: death.done });
+      await this.record(manager, actor, personId, 'heir-named');
+      return this.describe(manager, actor, personId);
+    });
+  }
+
+  /** Of how many people something waits to be passed on. */
+  async countOpen(actor: Actor): Promise<number> {
+    if (!hasRole(actor, 'steward')) return 0;
+    const { manager } = this.dataSource;
+    const deaths = await manager.findBy(DeathEntity, { communityId: actor.communityId });
+    let open = 0;
+    for (const { personId } of deaths) {
+      if ((await waitingHeirs(manager, actor, personId)).length > 0) open += 1;
+    }
+    return open;
+  }
+
   /** A note made by mistake. What somebody changed since stays as they changed it. */
   async undo(actor: Actor, personId: string): Promise<AfterDeath> {
     const { communityId } = actor;
@@ -97,7 +131,9 @@ export class AfterDeathService {
       chosen === 'pass-to'
         ? await manager.find(MembershipEntity, { where: { communityId }, relations: { person: true } })
         : [];
-    const after = chosen === 'tighten' ? tightened(before) : passedTo(before, passTo, members);
+    const heirId = heirOf(passTo, members);
+    if (chosen === 'pass-to' && heirId === null) return null;
+    const after = heirId === null ? tightened(before) : passedTo(before, heirId);
     if (sameJson(before, after)) return null;
     await share(manager, row, after);
     return { itemType, itemId, before, after };
@@ -117,6 +153,9 @@ export class AfterDeathService {
         passTo: many('pass-to'),
         remove: death?.removed ?? many('remove'),
       },
+      openHeirs: [
+        ...new Set((await waitingHeirs(manager, actor, personId)).map(({ passTo }) => passTo)),
+      ].toSorted(),
       mayUndo: death !== null && death.removed === 0,
     };
   }
@@ -125,7 +164,7 @@ export class AfterDeathService {
     manager: EntityManager,
     actor: Actor,
     personId: string,
-    action: 'death-noted' | 'death-undone',
+    action: 'death-noted' | 'death-undone' | 'heir-named',
   ): Promise<void> {
     await recordAudit(manager, {
       at: this.clock.now(),
@@ -167,6 +206,31 @@ async function consentsOf(
     where: { communityId, giverId, state: In(['given', 'given-with-conditions']) },
     order: { id: 'ASC' },
   });
+}
+
+/** Things still given by the person, to be passed to a name that fits nobody, or several. */
+async function waitingHeirs(
+  manager: EntityManager,
+  actor: Actor,
+  personId: string,
+): Promise<{ passTo: string; row: ItemSharingEntity }[]> {
+  const { communityId } = actor;
+  const consents = (await consentsOf(manager, actor, personId)).filter(
+    ({ details }) => details.afterDeath === 'pass-to',
+  );
+  if (consents.length === 0) return [];
+  const members = await manager.find(MembershipEntity, {
+    where: { communityId },
+    relations: { person: true },
+  });
+  const waiting: { passTo: string; row: ItemSharingEntity }[] = [];
+  for (const { itemType, itemId, details } of consents) {
+    if (heirOf(details.passTo, members) !== null) continue;
+    const row = await manager.findOneBy(ItemSharingEntity, { itemType, itemId });
+    if (row?.giverId !== personId || row.state === 'withdrawn') continue;
+    waiting.push({ passTo: details.passTo.trim(), row });
+  }
+  return waiting;
 }
 
 async function expectOfVillage(

@@ -9,6 +9,7 @@ import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import type { ActualDaysService } from '../actual-days/actual-days.service.js';
+import type { AfterDeathService } from '../after-death/after-death.service.js';
 import type { CalendarsService } from '../calendars/calendars.service.js';
 import type { ConsentsService } from '../consents/consents.service.js';
 import { civilDateAt } from '../places/place-day.service.js';
@@ -25,6 +26,7 @@ export interface TodayParts {
   coming: ComingMarkersService;
   waiting: WaitingService;
   consents: ConsentsService;
+  afterDeath: Pick<AfterDeathService, 'countOpen'>;
   actualDays: ActualDaysService;
   clock: Clock;
 }
@@ -60,6 +62,7 @@ export class TodayService {
       openWindows: published.flatMap((calendar) => openWindows(calendar, date)).sort(byLastDay),
       waiting: await waiting.of(actor, all, year),
       consentsDue: await this.parts.consents.countDue(actor),
+      heirsOpen: await this.parts.afterDeath.countOpen(actor),
     };
   }
 

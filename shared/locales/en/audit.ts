@@ -14,6 +14,7 @@ export const texts = {
     'roles-changed': '{{actor}} changed the roles of {{subject}} from {{before}} to {{after}}.',
     'code-renewed': '{{actor}} made a new code for {{subject}}.',
     'death-noted': '{{actor}} noted that {{subject}} has died; what they chose for it was done.',
+    'heir-named': '{{actor}} said who is meant by a name to whom {{subject}} left something.',
     'death-undone': '{{actor}} undid the note that {{subject}} has died.',
     'membership-ended': '{{actor}} took {{subject}} out of the village.',
     'password-set': '{{actor}} set a new password.',

@@ -130,6 +130,13 @@ export const texts = {
       remove_one: '{{count}} thing is removed for good',
       remove_other: '{{count}} things are removed for good',
     },
+    openHeirs:
+      'Nobody of the village is called so, or several are: {{names}}. When the day is noted, you say here who is meant; until then it stays as it is.',
+    heir: 'Who is “{{name}}”?',
+    heirHint: 'What they left to this name passes to whom you choose.',
+    heirNone: 'Choose somebody of the village',
+    pass: 'Pass it on',
+    passed: 'It is passed on.',
     day: 'Day of death',
     sure: 'I know that what they wanted removed will be gone for good.',
     note: 'Note it, and do what they chose',

@@ -98,6 +98,11 @@ export const texts = {
       title: '{{label}} of {{place}} can be printed',
       detail: 'Measure one page first, then print the rest.',
     },
+    'heirs-open': {
+      title_one: 'Something of {{count}} person who died waits to be passed on',
+      title_other: 'Something of {{count}} people who died waits to be passed on',
+      detail: 'Under People: say who is meant.',
+    },
     'consents-due': {
       title_one: '{{count}} consent is due to be asked again',
       title_other: '{{count}} consents are due to be asked again',

@@ -7,8 +7,8 @@ export function Component() {
   const { communityId } = useCurrentCommunity();
   return (
     <PeoplePage
-      quietly={({ id, displayName }) => (
-        <AfterDeathButton communityId={communityId} personId={id} name={displayName} />
+      quietly={({ id, displayName }, people) => (
+        <AfterDeathButton communityId={communityId} personId={id} name={displayName} people={people} />
       )}
     />
   );

@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { afterDeathEndpoints, type DeathInput } from '#shared/contracts/after-death.js';
+import { afterDeathEndpoints, type DeathInput, type HeirInput } from '#shared/contracts/after-death.js';
 import { callApi } from '#src/lib/api-client.js';
 
 /** Somebody of a village. */
@@ -19,6 +19,14 @@ export function useNoteDeath(whom: Whom) {
   const lookAgain = useLookAgain();
   return useMutation({
     mutationFn: (body: DeathInput) => callApi(afterDeathEndpoints.note, { params: { ...whom }, body }),
+    onSuccess: lookAgain,
+  });
+}
+
+export function useNameHeir(whom: Whom) {
+  const lookAgain = useLookAgain();
+  return useMutation({
+    mutationFn: (body: HeirInput) => callApi(afterDeathEndpoints.nameHeir, { params: { ...whom }, body }),
     onSuccess: lookAgain,
   });
 }

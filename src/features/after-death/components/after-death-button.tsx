@@ -4,10 +4,15 @@ import { useTranslation } from 'react-i18next';
 import { IconButton } from '#src/ui/button.js';
 import { Dialog } from '#src/ui/dialog.js';
 import type { Whom } from '../api/after-death-api.js';
+import type { Villager } from './heir-form.js';
 import { AfterDeath } from './after-death.js';
 
 /** A quiet way to note that somebody has died. */
-export function AfterDeathButton({ name, ...whom }: Whom & { name: string }) {
+export function AfterDeathButton({
+  name,
+  people,
+  ...whom
+}: Whom & { name: string; people: readonly Villager[] }) {
   const { t } = useTranslation('people');
   const [isOpen, setIsOpen] = useState(false);
   const close = () => {
@@ -24,7 +29,7 @@ export function AfterDeathButton({ name, ...whom }: Whom & { name: string }) {
       />
       {isOpen && (
         <Dialog title={t('death.title', { name })} isOpen onClose={close} closesBeside={false}>
-          <AfterDeath whom={whom} onDone={close} />
+          <AfterDeath whom={whom} others={people.filter(({ id }) => id !== whom.personId)} onDone={close} />
         </Dialog>
       )}
     </>

@@ -11,9 +11,19 @@ import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { afterDeathQuery, useNoteDeath, useUndoDeath, type Whom } from '../api/after-death-api.js';
+import { HeirForm, type Villager } from './heir-form.js';
 
 /** What they chose, in numbers; the day; and the way back while nothing was removed. */
-export function AfterDeath({ whom, onDone }: { whom: Whom; onDone: () => void }) {
+export function AfterDeath({
+  whom,
+  others,
+  onDone,
+}: {
+  whom: Whom;
+  /** Everybody else of the village. */
+  others: readonly Villager[];
+  onDone: () => void;
+}) {
   const words = useProblemWords();
   const { data, error, refetch } = useQuery(afterDeathQuery(whom));
   if (data === undefined) {
@@ -21,18 +31,19 @@ export function AfterDeath({ whom, onDone }: { whom: Whom; onDone: () => void })
     return <TroubleNote sentence={words.problem(error)} onRetry={() => void refetch()} />;
   }
   return data.diedOn === null ? (
-    <Note whom={whom} chosen={data.chosen} onDone={onDone} />
+    <Note whom={whom} state={data} onDone={onDone} />
   ) : (
-    <Noted whom={whom} state={data} onDone={onDone} />
+    <Noted whom={whom} others={others} state={data} onDone={onDone} />
   );
 }
 
 const CHOICES = ['keep', 'tighten', 'passTo', 'remove'] as const;
 
-function Note({ whom, chosen, onDone }: { whom: Whom; chosen: Chosen['chosen']; onDone: () => void }) {
+function Note({ whom, state, onDone }: { whom: Whom; state: Chosen; onDone: () => void }) {
   const { t } = useTranslation('people');
   const words = useProblemWords();
   const say = useToast();
+  const { chosen, openHeirs } = state;
   const note = useNoteDeath(whom);
   const [diedOn, setDiedOn] = useState('');
   const [isSure, setIsSure] = useState(false);
@@ -62,6 +73,9 @@ function Note({ whom, chosen, onDone }: { whom: Whom; chosen: Chosen['chosen']; 
           <li key={choice}>{t(`death.chosen.${choice}`, { count: chosen[choice] })}</li>
         ))}
       </ul>
+      {openHeirs.length > 0 && (
+        <p>{t('death.openHeirs', { names: openHeirs.map((each) => `“${each}”`).join(', ') })}</p>
+      )}
       <TextField
         type="date"
         label={t('death.day')}
@@ -93,7 +107,17 @@ function Note({ whom, chosen, onDone }: { whom: Whom; chosen: Chosen['chosen']; 
   );
 }
 
-function Noted({ whom, state, onDone }: { whom: Whom; state: Chosen; onDone: () => void }) {
+function Noted({
+  whom,
+  others,
+  state,
+  onDone,
+}: {
+  whom: Whom;
+  others: readonly Villager[];
+  state: Chosen;
+  onDone: () => void;
+}) {
   const { t } = useTranslation('people');
   const dates = useDateWords();
   const words = useProblemWords();
@@ -111,6 +135,9 @@ function Noted({ whom, state, onDone }: { whom: Whom; state: Chosen; onDone: () 
   return (
     <div className="grid gap-4">
       {state.diedOn !== null && <p>{t('death.noted', { day: dates.day(state.diedOn, 'year') })}</p>}
+      {state.openHeirs.map((name) => (
+        <HeirForm key={name} whom={whom} name={name} others={others} />
+      ))}
       {state.mayUndo ? (
         <Button busy={undo.isPending} onClick={() => void takeBack()}>
           {t('death.undo')}

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { CommunityPerson } from '#shared/contracts/people.js';
 import { useCurrentCommunity, useRoles } from '#src/lib/community.js';
@@ -19,7 +19,12 @@ import { RolesDialog } from './roles-dialog.js';
 import { VillageTabs } from './village-tabs.js';
 
 /** Who belongs to the village. The steward adds people with a code and sets roles. */
-export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) {
+export function PeoplePage({
+  quietly,
+}: {
+  /** What is seldom done to a person, with everybody of the village beside them. */
+  quietly?: (person: CommunityPerson, people: readonly CommunityPerson[]) => ReactNode;
+}) {
   const { t } = useTranslation('people');
   const { communityId, communityName } = useCurrentCommunity();
   const isSteward = useRoles().is('steward');
@@ -40,7 +45,10 @@ export function PeoplePage({ quietly }: { quietly?: PersonActions['quietly'] }) 
         <TroubleNote sentence={words.problem(people.error)} onRetry={() => void people.refetch()} />
       )}
       {people.data && (
-        <PeopleList people={people.data} actions={isSteward ? { ...actions, quietly } : null} />
+        <PeopleList
+          people={people.data}
+          actions={isSteward ? { ...actions, quietly: (person) => quietly?.(person, people.data) } : null}
+        />
       )}
       {inner && !isSteward && <p className="mt-3 text-umber-soft">{t('list.onlySteward')}</p>}
     </Board>

@@ -74,7 +74,9 @@ function TodayBoards({ data, asked, signs }: { data: Today; asked: ReactNode; si
   const { is } = useRoles();
   const { place } = useCurrentPlace();
   const first = data.coming[0];
-  const waiting = <WaitingBoard items={data.waiting} consentsDue={data.consentsDue} />;
+  const waiting = (
+    <WaitingBoard items={data.waiting} consentsDue={data.consentsDue} heirsOpen={data.heirsOpen} />
+  );
   const watch = first ? (
     <WatchCard coming={first} place={place} later={data.comingIsLater} />
   ) : data.placeId === null ? (

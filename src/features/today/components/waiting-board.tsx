@@ -1,4 +1,4 @@
-import { CircleDot, RotateCw } from 'lucide-react';
+import { CircleDot, Feather, RotateCw } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { WaitingItem } from '#shared/contracts/today.js';
@@ -32,20 +32,29 @@ const COUNTED: ReadonlySet<WaitingItem['kind']> = new Set([
 export function WaitingBoard({
   items,
   consentsDue,
+  heirsOpen,
 }: {
   items: readonly WaitingItem[];
   /** Consents to be asked for again, without what they are about. */
   consentsDue: number;
+  heirsOpen: number;
 }) {
   const { t } = useTranslation('today');
   const wordsOf = useWaitingWords();
-  if (items.length === 0 && consentsDue === 0) return null;
+  if (items.length === 0 && consentsDue === 0 && heirsOpen === 0) return null;
   const askAgain = {
     key: 'consents-due',
     icon: <RotateCw aria-hidden size={24} />,
     title: t('waiting.consents-due.title', { count: consentsDue }),
     detail: t('waiting.consents-due.detail'),
     to: paths.villageConsents(),
+  };
+  const passOn = {
+    key: 'heirs-open',
+    icon: <Feather aria-hidden size={24} />,
+    title: t('waiting.heirs-open.title', { count: heirsOpen }),
+    detail: t('waiting.heirs-open.detail'),
+    to: paths.villagePeople(),
   };
   return (
     <Board title={t('waiting.title')}>
@@ -60,6 +69,7 @@ export function WaitingBoard({
               : {}),
           })),
           ...(consentsDue > 0 ? [askAgain] : []),
+          ...(heirsOpen > 0 ? [passOn] : []),
         ]}
       />
     </Board>
