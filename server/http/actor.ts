@@ -60,6 +60,22 @@ export interface HandNow {
   personId: string;
 }
 
+/** What tells that a write is the same one again. */
+export interface WriteKey {
+  keyHash: string;
+  callHash: string;
+}
+
+const writeKeys = new AsyncLocalStorage<WriteKey | undefined>();
+
+export function withWriteKey<T>(key: WriteKey | undefined, work: () => T): T {
+  return writeKeys.run(key, work);
+}
+
+export function writeKeyNow(): WriteKey | undefined {
+  return writeKeys.getStore();
+}
+
 const hands = new AsyncLocalStorage<HandNow | undefined>();
 
 export function withHandOf<T>({ person, helper }: Actor, work: () => T): T {

@@ -2,7 +2,7 @@ import type { Endpoint } from '#shared/contracts/endpoint.js';
 import type { Request, Response, Router } from 'express';
 import type { DataSource } from 'typeorm';
 import type { z } from 'zod';
-import { withHandOf, type Actor, type Person } from './actor.js';
+import { withHandOf, withWriteKey, type Actor, type Person } from './actor.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
 import { actorFor, type HelpingRules } from './on-behalf.js';
@@ -11,6 +11,7 @@ import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-rep
 import { PreparedReply } from './reply.js';
 import { sameSession } from './same-session.js';
 import { withUpload, type UploadedFile } from './upload.js';
+import { writeKeyOf } from './write-key.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
 type Answer<E extends Endpoint> = E['fileType'] extends string
@@ -74,7 +75,8 @@ export class Mount {
     if (endpoint.access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
     this.add(endpoint, async (request, call) => {
       const actor = await this.actor(endpoint, request);
-      return withHandOf(actor, () => handler(call(), actor));
+      const key = writeKeyOf(endpoint, request, actor);
+      return withHandOf(actor, () => withWriteKey(key, () => handler(call(), actor)));
     });
   }
 

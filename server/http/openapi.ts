@@ -1,6 +1,7 @@
 import type { Endpoint } from '#shared/contracts/endpoint.js';
 import { ENDPOINTS } from '#shared/contracts/index.js';
 import { problem } from '#shared/contracts/problem.js';
+import { WRITE_KEY, WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { z } from 'zod';
 
 type Json = Record<string, unknown>;
@@ -38,6 +39,7 @@ function operation(endpoint: Endpoint): Json {
       ...parametersOf(endpoint.params, 'path'),
       ...parametersOf(endpoint.query, 'query'),
       ...csrf(endpoint),
+      ...writeKey(endpoint),
     ],
     ...(endpoint.body
       ? { requestBody: { required: true, content: contentOf(endpoint, endpoint.body) } }
@@ -88,6 +90,12 @@ function parametersOf(schema: z.ZodType | undefined, place: 'path' | 'query'): J
 function csrf(endpoint: Endpoint): Json[] {
   if (endpoint.method === 'GET') return [];
   return [{ name: 'X-CSRF-Token', in: 'header', required: true, schema: { type: 'string' } }];
+}
+
+function writeKey({ countsOnce }: Endpoint): Json[] {
+  if (!countsOnce) return [];
+  const schema = { type: 'string', pattern: WRITE_KEY.source };
+  return [{ name: WRITE_KEY_HEADER, in: 'header', required: false, schema }];
 }
 
 function schemaOf(schema: z.ZodType, io: 'input' | 'output'): Json {

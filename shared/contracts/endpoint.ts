@@ -47,6 +47,8 @@ export interface Endpoint<
   needsPassword: boolean;
   /** True where whoever helps somebody, with their PIN, reads what that person would. */
   readAsHelped: boolean;
+  /** True where the same write that comes again with its key counts once. */
+  countsOnce: boolean;
 }
 
 interface EndpointSpec<
@@ -69,6 +71,7 @@ interface EndpointSpec<
   upload?: Upload;
   needsPassword?: boolean;
   readAsHelped?: boolean;
+  countsOnce?: boolean;
 }
 
 /** Fills the defaults: status 200 with an answer, 204 without one. */
@@ -94,6 +97,7 @@ export function defineEndpoint<
     upload: spec.upload ?? null,
     needsPassword: spec.needsPassword ?? false,
     readAsHelped: spec.readAsHelped ?? false,
+    countsOnce: spec.countsOnce ?? false,
   };
 }
 

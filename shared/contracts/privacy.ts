@@ -17,6 +17,7 @@ export const PURPOSES = [
   'agreement',
   'records',
   'taking-back',
+  'sending-again',
 ] as const;
 export type Purpose = (typeof PURPOSES)[number];
 
@@ -27,6 +28,8 @@ export const KEPT_DAYS = {
   /** A code, a link or a card, after its end. */
   endedWayIn: 30,
   letter: 400,
+  /** That a write was done, in case a device that was without a network sends it again. */
+  writeKey: 14,
 } as const;
 
 /** Who stands behind the machine and the post, as the operator said it; null where nothing was said. */

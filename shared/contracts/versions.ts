@@ -209,6 +209,7 @@ export const versionsEndpoints = {
     path: '/api/calendars/:calendarId/versions',
     summary: 'Freeze the draft and send it to review',
     access: member('calendar', 'officer'),
+    countsOnce: true,
     params: calendarParams,
     response: version,
     status: 201,

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
+import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { ELDER_PIN_HEADER } from '#shared/contracts/on-behalf.js';
 import { sessionState } from '#shared/contracts/session.js';
 import { ApiProblem, readProblem } from './api-problem.js';
@@ -11,7 +12,11 @@ type Part<K extends string, S> = S extends z.ZodType ? Record<K, z.input<S>> : o
 /** What a call needs: `params`, `query` and `body` exactly where the endpoint declares them. */
 export type CallInput<E extends Endpoint> = Part<'params', E['params']> &
   Part<'query', E['query']> &
-  Part<'body', E['body']> & { signal?: AbortSignal | undefined };
+  Part<'body', E['body']> & {
+    signal?: AbortSignal | undefined;
+    /** Where the endpoint counts a write once: sent again with the same key, it is the same write. */
+    writeKey?: string | undefined;
+  };
 
 export type CallResult<E extends Endpoint> = E['response'] extends z.ZodType
   ? z.output<E['response']>
@@ -22,6 +27,7 @@ interface LooseInput {
   query?: Record<string, unknown>;
   body?: unknown;
   signal?: AbortSignal | undefined;
+  writeKey?: string | undefined;
 }
 
 /**
@@ -67,6 +73,7 @@ async function send(
   const init: RequestInit = { method: endpoint.method, headers, credentials: 'same-origin' };
   if (input.signal) init.signal = input.signal;
   if (endpoint.method !== 'GET') headers.set('X-CSRF-Token', csrfToken() ?? (await renewCsrfToken()));
+  if (input.writeKey !== undefined) headers.set(WRITE_KEY_HEADER, input.writeKey);
   if (elderPin !== null) headers.set(ELDER_PIN_HEADER, elderPin);
   if (endpoint.body !== undefined) {
     headers.set('Content-Type', 'application/json');

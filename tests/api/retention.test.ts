@@ -2,8 +2,10 @@ import { afterAll, beforeEach, beforeAll, describe, expect, it } from 'vitest';
 import { removeWhatIsOver } from '#server/features/privacy/retention.service.js';
 import type { AddedPerson } from '#shared/contracts/people.js';
 import { KEPT_DAYS } from '#shared/contracts/privacy.js';
+import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { en } from '#shared/locales/index.js';
 import { openTestApi, TEST_NOW, type Client, type TestApi } from '#tests/support/api.js';
+import { beginCalendar, entryInput, openVillage } from '#tests/support/calendar-api.js';
 import { openTestPost } from '#tests/support/letters.js';
 import { addGroup } from '#tests/support/sharing-api.js';
 
@@ -47,6 +49,13 @@ async function endedCard(): Promise<void> {
   await steward.delete(card).expect(204);
 }
 
+async function addedOnce(): Promise<void> {
+  const village = await openVillage(api);
+  const { id } = await beginCalendar(village);
+  const path = `/api/calendars/${id}/entries`;
+  await village.officer.post(path, entryInput()).set(WRITE_KEY_HEADER, 'once-and-for-all').expect(201);
+}
+
 describe('what has done its service', () => {
   /** What makes a row, its table, days until it is over by itself, and how long it is kept from then on. */
   it.each([
@@ -54,6 +63,7 @@ describe('what has done its service', () => {
     ['codes', 'one_time_code', codeForGuest, CODE_DAYS, KEPT_DAYS.endedWayIn],
     ['ended cards', 'sign_in_card', endedCard, 0, KEPT_DAYS.endedWayIn],
     ['letters', 'letter', askedForLink, 0, KEPT_DAYS.letter],
+    ['keys of writes', 'write_key', addedOnce, 0, KEPT_DAYS.writeKey],
   ] as const)(
     '%s are kept to their last second and gone after it',
     async (_, table, make, lastsDays, keptDays) => {

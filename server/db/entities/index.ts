@@ -38,6 +38,7 @@ import { SignEntity } from './sign.entity.js';
 import { SignSightingEntity } from './sign-sighting.entity.js';
 import { ActualDateEntity } from './actual-date.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
+import { WriteKeyEntity } from './write-key.entity.js';
 
 /** Named one by one: a glob would miss a file quietly, and breaks in a build. */
 export const ENTITIES = [
@@ -81,4 +82,5 @@ export const ENTITIES = [
   RolloverEntity,
   RolledItemEntity,
   CalendarImportEntity,
+  WriteKeyEntity,
 ];

@@ -22,6 +22,7 @@ import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.j
 import { Signs1799000000000 } from './1799000000000-signs.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
+import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -49,4 +50,5 @@ export const MIGRATIONS = [
   Signs1799000000000,
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
+  WriteKeys1799200000000,
 ];

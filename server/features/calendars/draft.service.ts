@@ -40,8 +40,12 @@ export async function lockCalendar(manager: EntityManager, calendarId: string): 
 /** The same for a change of the draft, which is locked while a submission is out. */
 export async function lockOpenDraft(manager: EntityManager, calendarId: string): Promise<CalendarEntity> {
   const calendar = await lockCalendar(manager, calendarId);
-  if (calendar.outNumber !== null) throw new AppError('draft-locked');
+  expectOpen(calendar);
   return calendar;
+}
+
+export function expectOpen({ outNumber }: CalendarEntity): void {
+  if (outNumber !== null) throw new AppError('draft-locked');
 }
 
 /** Writes down that somebody wrote to the draft: until the next published version they cannot sign. */

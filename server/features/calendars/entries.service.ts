@@ -15,7 +15,7 @@ import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
-import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
+import { conflict, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { entrySight, type EntrySight, type SeenThing } from '../../policy/entry-sight.js';
 import { withKeptGiver, withNaming } from '../../policy/giver-naming.js';
@@ -26,16 +26,17 @@ import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { actualDaysOf } from '../actual-days/known-days.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
-import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { expectTellableSigns, withListedSigns } from '../signs/entry-signs.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
+import { countOnce } from './count-once.service.js';
 import { orderAmongOthers } from './draft-order.service.js';
-import { lockOpenDraft, readDraft, recordContribution } from './draft.service.js';
+import { expectOpen, lockCalendar, readDraft, recordContribution } from './draft.service.js';
 import { expectMayWrite, mayWrite, shareChangedEntry, shareNewEntry } from './entry-sharing.service.js';
-import { knowsMarker, markerKeyOfLead, type SkyDatesService } from './sky-dates.service.js';
+import { changedFields, expectKnownMarker, expectSeenInYear, liveEntry } from './entry-checks.service.js';
+import { markerKeyOfLead, type SkyDatesService } from './sky-dates.service.js';
 
 /** The draft's entries. Each change waits for the calendar's lock and is refused while a submission is out. */
 export class EntriesService {
@@ -55,7 +56,7 @@ export class EntriesService {
   }
 
   async add(actor: Actor, calendarId: string, input: EntryInput): Promise<Entry> {
-    return this.change(calendarId, async (manager, calendar) => {
+    return this.changeOne(actor, calendarId, async (manager, calendar) => {
       const viewer = await this.viewer(manager, actor);
       await expectKnownMarker(manager, viewer, input, 'lead');
       const writing = { entryId: null, stored: null, written: input, prefix: '' };
@@ -67,13 +68,13 @@ export class EntriesService {
       await this.expectAnchored(manager, actor, calendar, id, 'lead');
       await writeOrder(manager, [...entries.map((entry) => entry.id), id]);
       await this.record(manager, actor, calendarId, 'entry-added', id);
-      return this.one(manager, actor, calendar, id);
+      return id;
     });
   }
 
   /** Saving what is stored already changes nothing: no new version, and nobody becomes a writer by it. */
   async update(actor: Actor, calendarId: string, entryId: string, input: EntryUpdate): Promise<Entry> {
-    return this.change(calendarId, async (manager, calendar) => {
+    return this.changeOne(actor, calendarId, async (manager, calendar) => {
       const row = await this.writable(manager, actor, calendarId, entryId);
       if (row.version !== input.version)
         throw stale(await this.one(manager, actor, calendar, entryId), input);
@@ -99,26 +100,26 @@ export class EntriesService {
         await this.expectAnchored(manager, actor, calendar, entryId, 'content.lead');
         await expectTellableSigns(manager, entryId, { ...writing, written: content });
       }
-      return this.one(manager, actor, calendar, entryId);
+      return entryId;
     });
   }
 
   /** The copy is shared as the original is, and with the same giver. */
   async duplicate(actor: Actor, calendarId: string, entryId: string): Promise<Entry> {
-    return this.change(calendarId, async (manager, calendar) => {
+    return this.changeOne(actor, calendarId, async (manager) => {
       const original = await this.writable(manager, actor, calendarId, entryId);
       const ids = (await liveEntries(manager, calendarId)).map((entry) => entry.id);
       const id = await this.insert(manager, actor, calendarId, original.content, ids.length);
       await copySharing(manager, 'entry', entryId, id);
       await writeOrder(manager, insertAt(ids, ids.indexOf(entryId) + 1, id));
       await this.record(manager, actor, calendarId, 'entry-copied', id, { from: entryId });
-      return this.one(manager, actor, calendar, id);
+      return id;
     });
   }
 
   /** The entry keeps its place in the order, so that putting it back puts it where it was. */
   async remove(actor: Actor, calendarId: string, entryId: string): Promise<void> {
-    await this.change(calendarId, async (manager) => {
+    const write = async (manager: EntityManager) => {
       await this.writable(manager, actor, calendarId, entryId);
       await expectNothingHangsOn(manager, await this.viewer(manager, actor), calendarId, entryId);
       const at = this.clock.now();
@@ -128,11 +129,13 @@ export class EntriesService {
         (await liveEntries(manager, calendarId)).map((entry) => entry.id),
       );
       await this.record(manager, actor, calendarId, 'entry-deleted', entryId);
-    });
+      return entryId;
+    };
+    await this.change(actor, calendarId, write, () => Promise.resolve());
   }
 
   async restore(actor: Actor, calendarId: string, entryId: string): Promise<Entry> {
-    return this.change(calendarId, async (manager, calendar) => {
+    return this.changeOne(actor, calendarId, async (manager) => {
       const row = await manager.findOneBy(EntryEntity, { id: entryId, calendarId });
       if (row === null) throw notFound();
       await this.expectWritable(manager, actor, entryId);
@@ -142,13 +145,13 @@ export class EntriesService {
       await manager.update(EntryEntity, { id: entryId }, this.touched(actor, { deletedAt: null }));
       await writeOrder(manager, insertAt(ids, row.position, entryId));
       await this.record(manager, actor, calendarId, 'entry-restored', entryId);
-      return this.one(manager, actor, calendar, entryId);
+      return entryId;
     });
   }
 
   /** Of the entries that the person sees; all others stay where they stand between them. */
   async reorder(actor: Actor, calendarId: string, entryIds: readonly string[]): Promise<EntryList> {
-    return this.change(calendarId, async (manager, calendar) => {
+    const write = async (manager: EntityManager) => {
       const rows = await liveEntries(manager, calendarId);
       const sight = await this.sight(manager, actor, rows);
       const seen = rows.filter((row) => sight.appearance(thingOf(row)) === 'full').map(({ id }) => id);
@@ -158,16 +161,37 @@ export class EntriesService {
         await recordContribution(manager, calendarId, actor.person.id, this.clock.now());
         await this.audit(manager, actor, 'entries-reordered', 'calendar', calendarId, { count: seen.length });
       }
-      return this.describe(manager, actor, calendar);
+      return calendarId;
+    };
+    return this.change(actor, calendarId, write, (manager, calendar) =>
+      this.describe(manager, actor, calendar),
+    );
+  }
+
+  /** A write that came before with the same key is not done again, also where the draft is locked by now. */
+  private change<T>(
+    actor: Actor,
+    calendarId: string,
+    write: (manager: EntityManager, calendar: CalendarEntity) => Promise<string>,
+    answer: (manager: EntityManager, calendar: CalendarEntity, id: string) => Promise<T>,
+  ): Promise<T> {
+    return inTransaction(this.dataSource, async (manager) => {
+      const calendar = await lockCalendar(manager, calendarId);
+      const id = await countOnce(manager, actor, this.clock.now(), () => {
+        expectOpen(calendar);
+        return write(manager, calendar);
+      });
+      return answer(manager, calendar, id);
     });
   }
 
-  private change<T>(
+  private changeOne(
+    actor: Actor,
     calendarId: string,
-    work: (manager: EntityManager, calendar: CalendarEntity) => Promise<T>,
-  ): Promise<T> {
-    return inTransaction(this.dataSource, async (manager) =>
-      work(manager, await lockOpenDraft(manager, calendarId)),
+    write: (manager: EntityManager, calendar: CalendarEntity) => Promise<string>,
+  ): Promise<Entry> {
+    return this.change(actor, calendarId, write, (manager, calendar, id) =>
+      this.one(manager, actor, calendar, id),
     );
   }
 
@@ -333,48 +357,6 @@ export class EntriesService {
 
 function thingOf({ id, content }: EntryEntity): SeenThing {
   return { entryId: id, markerKey: markerKeyOfLead(content.lead) };
-}
-
-async function liveEntry(manager: EntityManager, calendarId: string, entryId: string): Promise<EntryEntity> {
-  const row = await manager.findOneBy(EntryEntity, { id: entryId, calendarId });
-  if (row === null || row.deletedAt !== null) throw notFound();
-  return row;
-}
-
-/**
- * A figure that was taken out serves no new entry; one that goes by it already may be written on.
- * @param field where the lead stands in the request
- */
-async function expectKnownMarker(
-  manager: EntityManager,
-  viewer: Viewer,
-  { lead }: EntryInput,
-  field: string,
-): Promise<void> {
-  const markerKey = markerKeyOfLead(lead);
-  if (markerKey === null) return;
-  if (knowsMarker(markerKey, await figuresSeenBy(manager, viewer))) return;
-  throw invalidField(
-    lead.type === 'sky' ? `${field}.spec.markerKey` : `${field}.markerKey`,
-    'unknown-marker',
-  );
-}
-
-/** What was seen belongs to the calendar's year, or comes just before or after it. */
-function expectSeenInYear({ lead }: EntryInput, year: number, field: string): void {
-  if (lead.type !== 'marker-as-seen' || lead.seen === null) return;
-  if (Math.abs(Number(lead.seen.date.slice(0, 4)) - year) > 1) {
-    throw invalidField(`${field}.seen.date`, 'not-of-this-year');
-  }
-}
-
-/** Names of the fields that differ; what stands in them stays out of the record. */
-function changedFields(before: EntryInput, after: EntryInput): string[] {
-  const was = new Map<string, unknown>(Object.entries(before));
-  const is = new Map<string, unknown>(Object.entries(after));
-  return [...new Set([...was.keys(), ...is.keys()])]
-    .filter((field) => !sameJson(was.get(field) ?? null, is.get(field) ?? null))
-    .sort();
 }
 
 function insertAt(ids: readonly string[], index: number, id: string): string[] {

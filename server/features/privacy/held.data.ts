@@ -68,5 +68,6 @@ export const HELD: Readonly<Record<string, Held>> = {
     ['id', 'at', 'action', 'subject_type', 'subject_id'],
   ),
   kept_read: row('records', ['person_id'], 'all'),
+  write_key: row('sending-again', ['person_id'], ['result_id', 'done_at'], ['key_hash', 'call_hash']),
   withdrawal: row('taking-back', ['asked_by', 'done_by'], ['id', 'item_type', 'at', 'asked_by', 'done_by']),
 };

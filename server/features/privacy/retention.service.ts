@@ -1,4 +1,5 @@
 import type { EntityManager } from 'typeorm';
+import { removeOldWriteKeys } from '../calendars/count-once.service.js';
 import { removeOldCards } from '../cards/card-ends.service.js';
 import { removeOldLetters } from '../letters/letter-rounds.service.js';
 import { removeExpiredSessions } from '../session/end-sessions.service.js';
@@ -11,5 +12,6 @@ export async function removeWhatIsOver(manager: EntityManager, now: Date): Promi
     removeOldLetters(manager, now),
     removeOldCodes(manager, now),
     removeOldCards(manager, now),
+    removeOldWriteKeys(manager, now),
   ]);
 }

@@ -16,6 +16,7 @@ import type { Clock } from '../../http/context.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { countOnce } from '../calendars/count-once.service.js';
 import { draftWriterIds, forgetContributions, lockCalendar } from '../calendars/draft.service.js';
 import type { FrozenContentService } from './frozen-content.service.js';
 import { settleKeptEntries } from './kept-entries.service.js';
@@ -37,51 +38,59 @@ export class PublishingService {
   async submit(actor: Actor, calendarId: string): Promise<Version> {
     return inTransaction(this.dataSource, async (manager) => {
       const calendar = await lockCalendar(manager, calendarId);
-      if (calendar.outNumber !== null) throw conflict('submission-out');
-      const at = this.clock.now();
-      const { header, entries } = await this.contents.draftContent(manager, calendar, at);
-      if (entries.length === 0) throw conflict('no-entries');
-      if (header.weatherContact === '' || header.agricultureContact === '')
-        throw conflict('contacts-missing');
-      await this.expectRecordsComplete(manager, actor, entries);
-      const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
-      const variants = entries.flatMap(({ entryId, variants: beside = [] }) =>
-        beside.map((variant) => ({ ...variant, entryId })),
-      );
-      const sealed = seal(header, entries, variants, await earlierSeals(manager, calendarId));
-      const row = manager.create(CalendarVersionEntity, {
-        id: randomUUID(),
-        calendarId,
-        number: header.number,
-        label: null,
-        state: 'in-review',
-        stateNote: '',
-        headerText: sealed.headerText,
-        headerHash: sealed.headerHash,
-        hash: sealed.hash,
-        scheme: sealed.scheme,
-        leaves: sealed.leaves,
-        withdrawnTraces: 0,
-        headerRedacted: false,
-        signOffRule: community.signOffRule,
-        writerIds: await draftWriterIds(manager, calendarId),
-        submittedBy: actor.person.id,
-        submittedAt: at,
-        publishedAt: null,
-      });
-      await manager.insert(CalendarVersionEntity, row);
-      await insertEntries(manager, row.id, sealed.entries);
-      for (const variant of sealed.variants) {
-        await manager.insert(VersionVariantEntity, { id: randomUUID(), versionId: row.id, ...variant });
-      }
-      await manager.update(
-        CalendarEntity,
-        { id: calendarId },
-        { outNumber: header.number, submissionCount: header.number, updatedAt: at },
-      );
-      await this.record(manager, actor, row, 'submitted', { hash: sealed.hash });
+      const write = () => this.freeze(manager, actor, calendar);
+      const id = await countOnce(manager, actor, this.clock.now(), write);
+      const row = await manager.findOneByOrFail(CalendarVersionEntity, { id });
       return this.versions.describe(manager, actor, row);
     });
+  }
+
+  /** @returns the id of the new version */
+  private async freeze(manager: EntityManager, actor: Actor, calendar: CalendarEntity): Promise<string> {
+    const calendarId = calendar.id;
+    if (calendar.outNumber !== null) throw conflict('submission-out');
+    const at = this.clock.now();
+    const { header, entries } = await this.contents.draftContent(manager, calendar, at);
+    if (entries.length === 0) throw conflict('no-entries');
+    if (header.weatherContact === '' || header.agricultureContact === '') throw conflict('contacts-missing');
+    await this.expectRecordsComplete(manager, actor, entries);
+    const community = await manager.findOneByOrFail(CommunityEntity, { id: calendar.communityId });
+    const variants = entries.flatMap(({ entryId, variants: beside = [] }) =>
+      beside.map((variant) => ({ ...variant, entryId })),
+    );
+    const sealed = seal(header, entries, variants, await earlierSeals(manager, calendarId));
+    const row = manager.create(CalendarVersionEntity, {
+      id: randomUUID(),
+      calendarId,
+      number: header.number,
+      label: null,
+      state: 'in-review',
+      stateNote: '',
+      headerText: sealed.headerText,
+      headerHash: sealed.headerHash,
+      hash: sealed.hash,
+      scheme: sealed.scheme,
+      leaves: sealed.leaves,
+      withdrawnTraces: 0,
+      headerRedacted: false,
+      signOffRule: community.signOffRule,
+      writerIds: await draftWriterIds(manager, calendarId),
+      submittedBy: actor.person.id,
+      submittedAt: at,
+      publishedAt: null,
+    });
+    await manager.insert(CalendarVersionEntity, row);
+    await insertEntries(manager, row.id, sealed.entries);
+    for (const variant of sealed.variants) {
+      await manager.insert(VersionVariantEntity, { id: randomUUID(), versionId: row.id, ...variant });
+    }
+    await manager.update(
+      CalendarEntity,
+      { id: calendarId },
+      { outNumber: header.number, submissionCount: header.number, updatedAt: at },
+    );
+    await this.record(manager, actor, row, 'submitted', { hash: sealed.hash });
+    return row.id;
   }
 
   /** Final for this submission; the draft opens again. */

@@ -523,6 +523,7 @@ export const texts = {
     bothWrite:
       '{{name}} saved this entry while you were writing, and changed what you change. Write on; before you save, choose what stays.',
     seeBoth: 'See both texts',
+    sentAgain: 'It is sent again by itself, and saved once.',
   },
 
   submit: {

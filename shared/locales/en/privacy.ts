@@ -59,6 +59,11 @@ export const texts = {
       what: 'That something was taken back, when and by whom; nothing of what it was.',
       until: 'As long as the village uses the product: old copies of the tables could bring it back.',
     },
+    'sending-again': {
+      name: 'Sending again',
+      what: 'That something was saved, so that it counts once where a device without a network sends it twice; nothing of what it was.',
+      until: '{{writeKey}} days.',
+    },
   },
   who: 'Who sees it: people of the village as far as the level of each thing allows. Whoever runs the machine can reach its tables, and no role of the product reaches past the levels.',
   hosting: 'The machine stands in: {{where}}.',

@@ -41,6 +41,7 @@ export const texts = {
     'no-entries': 'The draft has no entries yet. Add one before you submit it.',
     'contacts-missing':
       'Weather and agriculture contacts are missing. The steward fills them in under Village, Settings.',
+    'write-key-used': 'This came with the key of something else. Load the page again and try once more.',
     'submission-out': 'A submission is out already. Take it back first.',
     'not-in-review': 'This submission is not in review any more.',
     'not-signed-off': 'Only a signed-off submission can be published.',

@@ -16,7 +16,7 @@ import { useToast } from '#src/ui/toast.js';
 import { beginAttachment } from '../api/attachment-uploads.js';
 import { useLookAgain } from '../api/attachments-api.js';
 import type { SharingOfAttachment } from '../model/kept-recordings.js';
-import { newId } from '../model/new-id.js';
+import { newId } from '#src/lib/new-id.js';
 import { useChosenPicture } from '../model/use-chosen-picture.js';
 import { useSending } from '../model/use-sending.js';
 import { CircleFields } from './circle-fields.js';

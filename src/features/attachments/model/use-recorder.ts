@@ -9,7 +9,7 @@ import {
   type KeptRecording,
   type SharingOfAttachment,
 } from './kept-recordings.js';
-import { newId } from './new-id.js';
+import { newId } from '#src/lib/new-id.js';
 import { useMicrophone, type Microphone } from './use-microphone.js';
 import { recordingType } from './voice-chain.js';
 

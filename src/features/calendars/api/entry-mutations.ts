@@ -1,7 +1,8 @@
-import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { calendarsEndpoints, type Entry, type EntryInput } from '#shared/contracts/calendars.js';
 import { versionsEndpoints } from '#shared/contracts/versions.js';
 import { callApi } from '#src/lib/api-client.js';
+import { useKeyedWrite } from '#src/lib/keyed-write.js';
 import { calendarKeys, versionQuery } from '#src/lib/calendar-queries.js';
 import { entriesQuery } from './calendars-queries.js';
 
@@ -10,19 +11,23 @@ function useEntriesChanged(calendarId: string) {
   const client = useQueryClient();
   return {
     client,
-    show: (change: (entries: readonly Entry[]) => Entry[]) => {
+    show: (change: (entries: readonly Entry[]) => Entry[], goneId?: string) => {
       client.setQueryData(
         entriesQuery(calendarId).queryKey,
         (list) => list && { ...list, items: change(list.items) },
       );
-      void lookAgain(client, calendarId);
+      void lookAgain(client, calendarId, goneId);
     },
   };
 }
 
-function lookAgain(client: QueryClient, calendarId: string): Promise<void> {
+/** What belongs to an entry that is gone is asked for no more, though it may still be on the screen. */
+function lookAgain(client: QueryClient, calendarId: string, goneId?: string): Promise<void> {
   void client.invalidateQueries({ queryKey: [...calendarKeys.all, 'list'] });
-  return client.invalidateQueries({ queryKey: calendarKeys.one(calendarId) });
+  return client.invalidateQueries({
+    queryKey: calendarKeys.one(calendarId),
+    predicate: ({ queryKey }) => goneId === undefined || !queryKey.includes(goneId),
+  });
 }
 
 /** Takes over an entry that somebody else saved meanwhile. */
@@ -35,9 +40,9 @@ export function useTakeEntry(calendarId: string): (entry: Entry) => void {
 
 export function useAddEntry(calendarId: string) {
   const { show } = useEntriesChanged(calendarId);
-  return useMutation({
-    mutationFn: (content: EntryInput) =>
-      callApi(calendarsEndpoints.addEntry, { params: { calendarId }, body: content }),
+  return useKeyedWrite({
+    write: (content: EntryInput, writeKey) =>
+      callApi(calendarsEndpoints.addEntry, { params: { calendarId }, body: content, writeKey }),
     onSuccess: (added) => {
       show((entries) => [...entries, added]);
     },
@@ -46,9 +51,9 @@ export function useAddEntry(calendarId: string) {
 
 export function useUpdateEntry(calendarId: string) {
   const { show } = useEntriesChanged(calendarId);
-  return useMutation({
-    mutationFn: ({ entryId, ...body }: { entryId: string; content: EntryInput; version: number }) =>
-      callApi(calendarsEndpoints.updateEntry, { params: { calendarId, entryId }, body }),
+  return useKeyedWrite({
+    write: ({ entryId, ...body }: { entryId: string; content: EntryInput; version: number }, writeKey) =>
+      callApi(calendarsEndpoints.updateEntry, { params: { calendarId, entryId }, body, writeKey }),
     onSuccess: (saved) => {
       show((entries) => entries.map((each) => (each.id === saved.id ? saved : each)));
     },
@@ -57,9 +62,9 @@ export function useUpdateEntry(calendarId: string) {
 
 export function useDuplicateEntry(calendarId: string) {
   const { show } = useEntriesChanged(calendarId);
-  return useMutation({
-    mutationFn: (entryId: string) =>
-      callApi(calendarsEndpoints.duplicateEntry, { params: { calendarId, entryId } }),
+  return useKeyedWrite({
+    write: (entryId: string, writeKey) =>
+      callApi(calendarsEndpoints.duplicateEntry, { params: { calendarId, entryId }, writeKey }),
     onSuccess: (copy) => {
       show((entries) => [...entries.slice(0, copy.position), copy, ...entries.slice(copy.position)]);
     },
@@ -68,20 +73,20 @@ export function useDuplicateEntry(calendarId: string) {
 
 export function useDeleteEntry(calendarId: string) {
   const { show } = useEntriesChanged(calendarId);
-  return useMutation({
-    mutationFn: (entryId: string) =>
-      callApi(calendarsEndpoints.deleteEntry, { params: { calendarId, entryId } }),
+  return useKeyedWrite({
+    write: (entryId: string, writeKey) =>
+      callApi(calendarsEndpoints.deleteEntry, { params: { calendarId, entryId }, writeKey }),
     onSuccess: (_, entryId) => {
-      show((entries) => entries.filter((each) => each.id !== entryId));
+      show((entries) => entries.filter((each) => each.id !== entryId), entryId);
     },
   });
 }
 
 export function useRestoreEntry(calendarId: string) {
   const { show } = useEntriesChanged(calendarId);
-  return useMutation({
-    mutationFn: (entryId: string) =>
-      callApi(calendarsEndpoints.restoreEntry, { params: { calendarId, entryId } }),
+  return useKeyedWrite({
+    write: (entryId: string, writeKey) =>
+      callApi(calendarsEndpoints.restoreEntry, { params: { calendarId, entryId }, writeKey }),
     onSuccess: (back) => {
       show((entries) => [...entries.slice(0, back.position), back, ...entries.slice(back.position)]);
     },
@@ -92,11 +97,12 @@ export function useRestoreEntry(calendarId: string) {
 export function useReorderEntries(calendarId: string) {
   const { client } = useEntriesChanged(calendarId);
   const { queryKey } = entriesQuery(calendarId);
-  return useMutation({
-    mutationFn: (entryIds: readonly string[]) =>
+  return useKeyedWrite({
+    write: (entryIds: readonly string[], writeKey) =>
       callApi(calendarsEndpoints.reorderEntries, {
         params: { calendarId },
         body: { entryIds: [...entryIds] },
+        writeKey,
       }),
     onMutate: async (entryIds) => {
       await client.cancelQueries({ queryKey });
@@ -112,7 +118,7 @@ export function useReorderEntries(calendarId: string) {
       );
       return before;
     },
-    onError: (_, __, before) => {
+    onError: (before) => {
       client.setQueryData(queryKey, before);
       void lookAgain(client, calendarId);
     },
@@ -125,8 +131,9 @@ export function useReorderEntries(calendarId: string) {
 /** Freezes the draft and sends it to the elders. */
 export function useSubmitDraft(calendarId: string) {
   const client = useQueryClient();
-  return useMutation({
-    mutationFn: () => callApi(versionsEndpoints.submit, { params: { calendarId } }),
+  return useKeyedWrite({
+    write: (_nothing: undefined, writeKey) =>
+      callApi(versionsEndpoints.submit, { params: { calendarId }, writeKey }),
     onSuccess: (version) => {
       client.setQueryData(versionQuery(calendarId, version.number).queryKey, version);
       void lookAgain(client, calendarId);

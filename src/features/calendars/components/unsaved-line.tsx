@@ -18,6 +18,7 @@ export function UnsavedLine({
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
   const keptAt = editor.edits.keptAt(entry.id);
+  const isUnderway = editor.edits.all.get(entry.id)?.sending !== undefined;
   if (!entry.unsaved) {
     return entry.saved ? (
       <p className="text-small text-umber-soft">
@@ -29,6 +30,7 @@ export function UnsavedLine({
     <div className="flex flex-wrap items-center gap-x-3">
       <p className="text-small text-umber-soft">
         {keptAt === null ? t('editor.notKept') : t('editor.keptHere', { when: dates.moment(keptAt) })}
+        {isUnderway && ` ${t('live.sentAgain')}`}
       </p>
       {entry.saved && (
         <Button

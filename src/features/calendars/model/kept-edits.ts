@@ -1,3 +1,5 @@
+import { z } from 'zod';
+import { WRITE_KEY } from '#shared/contracts/write-key.js';
 import { entryInput, entryLead, type EntryInput } from '#shared/contracts/calendars.js';
 import { EMPTY_RECORD } from '#shared/contracts/event-record.js';
 import { sharingDetails } from '#shared/contracts/sharing.js';
@@ -11,7 +13,22 @@ export interface EntryEdit {
   base: EntryInput | null;
   baseVersion: number | null;
   keptAt: string;
+  /** What is on its way to the server while no answer has come; it may have been saved. */
+  sending?: Sending | undefined;
 }
+
+/** A text with the key under which it counts once; `version` is null for a new entry. */
+export interface Sending {
+  key: string;
+  content: EntryInput;
+  version: number | null;
+}
+
+const sendingShape = z.strictObject({
+  key: z.string().regex(WRITE_KEY),
+  content: entryInput,
+  version: z.number().nullable(),
+});
 
 export type Edits = ReadonlyMap<string, EntryEdit>;
 
@@ -51,13 +68,21 @@ export function forgetEdit(personId: string, calendarId: string, entryId: string
 /** What another release kept may have another shape; it is then left alone rather than half read. */
 function readEdit(kept: unknown): EntryEdit | null {
   if (typeof kept !== 'object' || kept === null) return null;
-  const { draft: written, base, baseVersion, keptAt } = kept as Partial<Record<keyof EntryEdit, unknown>>;
+  const {
+    draft: written,
+    base,
+    baseVersion,
+    keptAt,
+    sending,
+  } = kept as Partial<Record<keyof EntryEdit, unknown>>;
   // What was kept before there were these parts goes on with empty ones.
   const draft = typeof written === 'object' ? { record: EMPTY_RECORD, ...NEWER_LEADS, ...written } : null;
   if (typeof keptAt !== 'string' || !(baseVersion === null || typeof baseVersion === 'number')) return null;
   if (!isDraft(draft)) return null;
   if (base !== null && !entryInput.safeParse(base).success) return null;
-  return { draft, base: base as EntryInput | null, baseVersion, keptAt };
+  const underway = sendingShape.safeParse(sending);
+  const edit = { draft, base: base as EntryInput | null, baseVersion, keptAt };
+  return underway.success ? { ...edit, sending: underway.data } : edit;
 }
 
 function isDraft(draft: unknown): draft is EntryDraft {

@@ -36,7 +36,12 @@ export function useDraftChanges(calendarId: string): void {
       // What is on its way from this page shows in the draft before its own answer has come.
       const isOwn = client.isMutating() > 0;
       const titles = new Map(list.items.map(({ id, content }) => [id, content.titleOfficer]));
-      await client.invalidateQueries({ queryKey: calendarKeys.one(calendarId) });
+      // The list first: what belongs to an entry that is gone is then asked for no more.
+      await client.invalidateQueries({ queryKey: calendarKeys.entries(calendarId), exact: true });
+      await client.invalidateQueries({
+        queryKey: calendarKeys.one(calendarId),
+        predicate: ({ queryKey }) => queryKey[2] !== 'entries' || queryKey.length > 3,
+      });
       latest.current(isOwn ? { ...news, gone: [] } : news, titles);
     };
     const ways = {

@@ -93,7 +93,7 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
     selected,
     newStart,
     draft: selected ? draftFor(selected, writing, newStart) : null,
-    stale: selected !== null && isStale(selected.saved, edit),
+    stale: selected !== null && !edit?.sending && isStale(selected.saved, edit),
     orphans: canWrite && entries.isSuccess ? orphans(saved, writing) : [],
     answers: answers.byEntry,
     lastNumber: answers.newest?.number ?? null,

@@ -3,7 +3,7 @@ import type { Entry, EntryInput } from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { useSession } from '#src/lib/session.js';
 import { contentOf, differsFrom, draftOf, sameContent, type EntryDraft } from './entry-draft.js';
-import { forgetEdit, keepEdit, readEdits, type EntryEdit, type Edits } from './kept-edits.js';
+import { forgetEdit, keepEdit, readEdits, type EntryEdit, type Edits, type Sending } from './kept-edits.js';
 import { isStale } from './shown-entries.js';
 import { takenIn } from './take-in.js';
 
@@ -25,6 +25,9 @@ export interface EntryEdits {
   drop: (entryId: string) => void;
   /** After saving `sent`. What was written while it was on its way stays, over the state that is saved now. */
   settle: (entryId: string, sent: EntryInput, saved: Entry) => void;
+  /** Keeps at once what is on its way to the server; null when it is known what became of it. */
+  mark: (entryId: string, sending: Sending | null) => void;
+  sendingOf: (entryId: string) => Sending | null;
   /** Lays what is written over newer saved states, where nobody has to choose. */
   takeIn: (saved: readonly Entry[]) => void;
 }
@@ -97,18 +100,38 @@ export function useEntryEdits(calendarId: string): EntryEdits {
     (entryId: string, sent: EntryInput, saved: Entry) => {
       const edit = newest.current.get(entryId);
       drop(entryId);
-      if (edit && !sameContent(contentOf(edit.draft), sent)) {
-        put(saved.id, { ...edit, base: saved.content, baseVersion: saved.version });
-      }
+      if (!edit || sameContent(contentOf(edit.draft), sent)) return;
+      const { sending: _done, ...rest } = edit;
+      // An answer that came late may tell of a newer state than the one that was sent.
+      const isMine = sameContent(saved.content, sent);
+      const over = {
+        ...{ ...rest, base: sent },
+        baseVersion: isMine ? saved.version : saved.version - 1,
+      };
+      put(saved.id, isMine ? over : (takenIn(over, saved) ?? over));
     },
     [put, drop],
   );
+
+  const mark = useCallback(
+    (entryId: string, sending: Sending | null) => {
+      const edit = newest.current.get(entryId);
+      if (edit === undefined) return;
+      const { sending: _before, ...rest } = edit;
+      put(entryId, sending === null ? rest : { ...rest, sending });
+      flush();
+    },
+    [put, flush],
+  );
+
+  const sendingOf = useCallback((entryId: string) => newest.current.get(entryId)?.sending ?? null, []);
 
   const takeIn = useCallback(
     (saved: readonly Entry[]) => {
       for (const entry of saved) {
         const edit = newest.current.get(entry.id);
-        if (!isStale(entry, edit) || edit === undefined) continue;
+        // What is on its way may be the newer state itself.
+        if (!isStale(entry, edit) || edit === undefined || edit.sending) continue;
         const laid = takenIn(edit, entry);
         if (laid === null) continue;
         if (differsFrom(laid.draft, entry.content)) put(entry.id, laid);
@@ -129,9 +152,11 @@ export function useEntryEdits(calendarId: string): EntryEdits {
       put,
       drop,
       settle,
+      mark,
+      sendingOf,
       takeIn,
     }),
-    [all, unkept, change, put, drop, settle, takeIn],
+    [all, unkept, change, put, drop, settle, mark, sendingOf, takeIn],
   );
 }
 
@@ -153,5 +178,7 @@ export function changedEdit(
     saved === null
       ? sameJson(draft, beginning)
       : baseVersion === saved.version && !differsFrom(draft, saved.content);
-  return isBack ? null : { draft, base, baseVersion, keptAt: now.toISOString() };
+  const sending = before?.sending;
+  if (isBack && sending === undefined) return null;
+  return { draft, base, baseVersion, keptAt: now.toISOString(), ...(sending ? { sending } : {}) };
 }

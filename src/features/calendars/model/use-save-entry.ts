@@ -12,10 +12,12 @@ import { ApiProblem } from '#src/lib/api-problem.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useToast } from '#src/ui/toast.js';
-import { useAddEntry, useTakeEntry, useUpdateEntry } from '../api/entry-mutations.js';
+import { useTakeEntry } from '../api/entry-mutations.js';
 import { draftOf } from './entry-draft.js';
 import { NO_PROBLEMS, problemsFrom, problemsOf, type FieldProblems } from './field-problems.js';
+import { useDeliver } from './use-deliver.js';
 import type { Editor } from './use-editor.js';
+import { useSendAgain } from './use-send-again.js';
 
 /** The last try to save an entry that did not come through. */
 interface Refused {
@@ -48,8 +50,8 @@ export function useSaveEntry(editor: Editor): SaveEntry {
   const words = useProblemWords();
   const client = useQueryClient();
   const takeEntry = useTakeEntry(calendar.id);
-  const add = useAddEntry(calendar.id);
-  const update = useUpdateEntry(calendar.id);
+  const deliver = useDeliver(calendar.id, edits);
+  useSendAgain(editor, deliver);
   const [refused, setRefused] = useState<Refused | null>(null);
   const [choosingId, setChoosingId] = useState<string | null>(null);
 
@@ -81,14 +83,10 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       return;
     }
     try {
-      const saved =
-        version === null
-          ? await add.mutateAsync(parsed.data)
-          : await update.mutateAsync({ entryId, content: parsed.data, version });
+      const saved = await deliver.send(entryId, parsed.data, version);
       setRefused(null);
       setChoosingId(null);
-      edits.settle(entryId, content, saved);
-      if (version === null) selection.open(saved.id);
+      if (saved.id !== entryId) selection.open(saved.id);
       say(t('editor.saved', { title: saved.content.titleOfficer }));
     } catch (cause) {
       meet(cause, entryId, content);
@@ -116,7 +114,7 @@ export function useSaveEntry(editor: Editor): SaveEntry {
     },
     choose: setChoosingId,
     choosingId,
-    isSaving: add.isPending || update.isPending,
+    isSaving: deliver.isPending,
     problems:
       selected === null ? NO_PROBLEMS : shownProblems(selected.content, isRefused, refused, isUnchanged),
     overall: isUnchanged ? refused.overall : null,

@@ -1,6 +1,6 @@
 import { expect, it } from 'vitest';
 import { z } from 'zod';
-import { newId } from '#src/features/attachments/model/new-id.js';
+import { newId } from '#src/lib/new-id.js';
 
 it('makes ids that the server takes, each another one', () => {
   const ids = Array.from({ length: 50 }, newId);

@@ -1,0 +1,200 @@
+import type { Page, Route } from '@playwright/test';
+import { expect, test } from '#tests/support/journey.js';
+import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import { beginEmptyCalendar, draftOf, makeIrvelOfficer, putIn } from '#tests/support/officer-pair.js';
+
+/*
+ * Two officers write one draft: each hears within seconds what the other saved and writes on; where both changed the same
+ * thing, a person chooses. Then the network loses, doubles and delays every kind of write: nothing is lost, nothing comes twice.
+ */
+test.use({
+  viewport: { width: 1280, height: 900 },
+  actionTimeout: 15_000,
+  // The browser tells of the connections that the journey breaks.
+  expectedNoise: [/net::ERR_FAILED|409 \(Conflict\)/u],
+});
+
+const SECONDS = { timeout: 5_000 };
+
+test('two officers in one draft hear of each other, and nobody’s text is lost', async ({
+  page,
+  browser,
+  baseURL,
+}) => {
+  test.setTimeout(90_000);
+  const steward = await browser.newContext({ baseURL: baseURL ?? '' });
+  await makeIrvelOfficer(await steward.newPage());
+  await steward.close();
+  await signIn(page, 'officer');
+  const calendarId = await beginEmptyCalendar(page, 2030);
+  const { id } = await putIn(page, calendarId, 'Sow long millet');
+
+  const phone = await browser.newContext({ baseURL: baseURL ?? '', viewport: { width: 320, height: 640 } });
+  const irvel = await phone.newPage();
+  await signIn(irvel, 'staff');
+  await irvel.goto(`/calendars/${calendarId}?entry=${id}`);
+  await irvel.getByText('What', { exact: true }).click();
+  const notes = irvel.getByRole('textbox', { name: 'Notes' });
+  await notes.pressSequentially('Lower terraces');
+
+  await page.goto(`/calendars/${calendarId}?entry=${id}`);
+  await page.getByText('What', { exact: true }).click();
+  await page.getByLabel('Crop or variety').fill('short millet');
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(irvel.getByText('Beyno saved “Sow long millet”.')).toBeVisible(SECONDS);
+  await notes.pressSequentially(' first');
+  await expect(notes).toBeFocused();
+  await expect(notes).toHaveValue('Lower terraces first');
+  await expect(irvel.getByLabel('Crop or variety')).toHaveValue('short millet');
+
+  await notes.fill('Upper terraces first');
+  await page.getByRole('textbox', { name: 'Notes' }).fill('Nobody’s terraces');
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(irvel.getByText(/^Beyno saved this entry while you were writing/)).toBeVisible(SECONDS);
+  await expect(notes).toHaveValue('Upper terraces first');
+  await irvel.getByRole('button', { name: 'Save the entry' }).click();
+  const both = irvel.getByRole('region', { name: 'Two people wrote to this entry' });
+  const choice = both.getByRole('group', { name: 'Notes' });
+  await expect(choice).toContainText('Nobody’s terraces');
+  await expect(choice).toContainText('Upper terraces first');
+  await expectNoSidewaysScroll(irvel);
+  await expectAccessible(irvel);
+  await choice.getByRole('radio').first().focus();
+  await irvel.keyboard.press('Space');
+  await irvel.keyboard.press('ArrowDown');
+  await both.getByRole('button', { name: 'Save what I chose' }).focus();
+  await irvel.keyboard.press('Enter');
+  await expect(irvel.getByText('Saved: Sow long millet.')).toBeVisible();
+  await expect(page.getByText('Irvel saved “Sow long millet”.')).toBeVisible(SECONDS);
+  await expect(page.getByRole('textbox', { name: 'Notes' })).toHaveValue('Upper terraces first');
+  await phone.close();
+});
+
+/** What a network does to the first write that passes; all others pass as they are. */
+const MISHAPS: Record<string, (route: Route) => Promise<void>> = {
+  'lost on the way back': async (route) => {
+    await route.fetch();
+    await route.abort();
+  },
+  doubled: async (route) => {
+    await route.fetch();
+    await route.fulfill({ response: await route.fetch() });
+  },
+  late: async (route) => {
+    const early = route.fetch();
+    await route.abort();
+    await early;
+  },
+};
+
+async function once(page: Page, mishap: (route: Route) => Promise<void>): Promise<void> {
+  let isFirst = true;
+  await page.unroute('**/api/calendars/**');
+  await page.route('**/api/calendars/**', async (route) => {
+    if (route.request().method() === 'GET' || !isFirst) {
+      await route.fallback();
+      return;
+    }
+    isFirst = false;
+    await mishap(route);
+  });
+}
+
+test('every write of the editor counts once, whatever the network does to it', async ({ page }) => {
+  test.setTimeout(150_000);
+  await signIn(page, 'officer');
+  const calendarId = await beginEmptyCalendar(page, 2031);
+  await putIn(page, calendarId, 'Mend the walls', 1);
+  const titles = async () => (await draftOf(page, calendarId)).map(({ content }) => content.titleOfficer);
+  const toast = (text: string) => page.locator('.toast', { hasText: text }).last();
+  await page.goto(`/calendars/${calendarId}`);
+
+  let before = ['Mend the walls'];
+  for (const [name, mishap] of Object.entries(MISHAPS)) {
+    const title = `Work ${name}`;
+    await once(page, mishap);
+    await page.getByRole('button', { name: 'Add an entry' }).click();
+    await page.getByLabel(/^Name of the work or rite/).fill(title);
+    await page.getByRole('radio', { name: /^A fixed date/ }).check();
+    await page.getByLabel('Who set it, and where it is written').first().fill('the village');
+    await page.getByRole('button', { name: 'Save the entry' }).click();
+    await expect(toast(`Saved: ${title}.`)).toBeVisible();
+    expect(await titles(), `added, ${name}`).toEqual([...before, title]);
+
+    await once(page, mishap);
+    await page.getByText('What', { exact: true }).click();
+    await page.getByLabel('Crop or variety').fill('beans');
+    await page.getByRole('button', { name: 'Save the entry' }).click();
+    await expect(page.getByText('Nothing is changed.')).toBeVisible();
+    expect((await draftOf(page, calendarId))[before.length]?.content.crop, `saved, ${name}`).toBe('beans');
+
+    await once(page, mishap);
+    await page.getByRole('button', { name: 'Duplicate' }).click();
+    await expect(toast(`A copy of ${title} stands behind it.`)).toBeVisible();
+    expect(await titles(), `copied, ${name}`).toEqual([...before, title, title]);
+
+    await once(page, mishap);
+    await page.getByRole('button', { name: 'Take it out' }).click();
+    await expect(toast(`${title} is taken out.`)).toBeVisible();
+    expect(await titles(), `taken out, ${name}`).toEqual([...before, title]);
+
+    await once(page, mishap);
+    await toast(`${title} is taken out.`).getByRole('button', { name: 'Undo' }).click();
+    await expect(toast(`${title} is back.`)).toBeVisible();
+    before = [...before, title, title];
+    expect(await titles(), `put back, ${name}`).toEqual(before);
+  }
+});
+
+test('what was on its way when the page went is sent again by itself, once', async ({ page }) => {
+  await signIn(page, 'officer');
+  const calendarId = await beginEmptyCalendar(page, 2032);
+  await putIn(page, calendarId, 'Weed', 20);
+  const { id } = await putIn(page, calendarId, 'Mend the walls', 1);
+  const lost = async (route: Route) => {
+    if (route.request().method() === 'GET') {
+      await route.fallback();
+      return;
+    }
+    await route.fetch();
+    await route.abort();
+  };
+  await page.route('**/api/calendars/**', lost);
+  await page.goto(`/calendars/${calendarId}`);
+  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await page.getByLabel(/^Name of the work or rite/).fill('Sow');
+  await page.getByRole('radio', { name: /^A fixed date/ }).check();
+  await page.getByLabel('Who set it, and where it is written').first().fill('the village');
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(page.getByText(/It is sent again by itself, and saved once/)).toBeVisible();
+  // Written on while nobody knows what became of the first text.
+  await page.getByLabel('Crop or variety').fill('beans');
+  await expect(page.getByText(/Kept on this device/)).toBeVisible();
+  await page.reload();
+  await expect(page.getByLabel('Crop or variety')).toHaveValue('beans');
+  await page.unroute('**/api/calendars/**');
+  await page.evaluate(() => dispatchEvent(new Event('online')));
+  await expect(page.locator('.toast', { hasText: 'Saved: Sow.' }).last()).toBeVisible();
+  await page.getByRole('button', { name: 'Save the entry' }).click();
+  await expect(page.getByText('Nothing is changed.')).toBeVisible();
+  expect(
+    (await draftOf(page, calendarId)).map(({ content }) => [content.titleOfficer, content.crop]),
+  ).toEqual([
+    ['Weed', ''],
+    ['Mend the walls', ''],
+    ['Sow', 'beans'],
+  ]);
+
+  // Moved and submitted while answers are lost: done once each.
+  await once(page, MISHAPS['lost on the way back'] ?? lost);
+  await page.goto(`/calendars/${calendarId}?entry=${id}`);
+  await page.getByRole('button', { name: 'Change the order' }).click();
+  await page.getByRole('button', { name: 'Move Mend the walls up' }).click();
+  await expect
+    .poll(async () => (await draftOf(page, calendarId)).map(({ content }) => content.titleOfficer))
+    .toEqual(['Mend the walls', 'Weed', 'Sow']);
+  await once(page, MISHAPS['lost on the way back'] ?? lost);
+  await page.getByRole('button', { name: 'Submit for review' }).click();
+  await page.getByRole('dialog').getByRole('button', { name: 'Submit it' }).click();
+  await expect(page).toHaveURL(/versions\/1$/u);
+});
