@@ -40,7 +40,8 @@ export function useDraftChanges(calendarId: string): void {
       await client.invalidateQueries({ queryKey: calendarKeys.entries(calendarId), exact: true });
       await client.invalidateQueries({
         queryKey: calendarKeys.one(calendarId),
-        predicate: ({ queryKey }) => queryKey[2] !== 'entries' || queryKey.length > 3,
+        predicate: ({ queryKey }) =>
+          queryKey[2] !== 'entries' && !news.gone.some((entryId) => queryKey.includes(entryId)),
       });
       latest.current(isOwn ? { ...news, gone: [] } : news, titles);
     };
