@@ -92,6 +92,12 @@ export function sheetWords({ translate: t, language, year, villageMonths }: Shee
         : t('entry.signsSome', { signs: end(signs), count: needed }),
     ifLate: (rule) => t('entry.ifLate', { rule: end(rule) }),
     takeCare: (caution) => t('entry.takeCare', { caution: end(caution) }),
+    stopOn: ({ date, source }) => t('entry.stopOn', { date: day(date), source: end(source) }),
+    checkedBy: ({ texts, office, name, date }) =>
+      t('entry.checkedBy', {
+        ...{ office, name, date: dayAndYear(date) },
+        texts: list(texts.map((text) => t(`entry.checkedText.${text}`))),
+      }),
     noDateBecause: (of) => t('entry.noDateBecause', of),
     noDate: (title) => (title === '' ? t('entry.noDateUntitled') : t('entry.noDate', { title })),
 

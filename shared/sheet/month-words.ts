@@ -113,7 +113,7 @@ export function entryWhen(model: SheetModel, entry: SheetEntry): { side: string[
   return { side: [words.bestDays(), words.range(main.from, main.to)], sentence: words.bestFromTo(main) };
 }
 
-/** What to know about an entry besides its days, in the order look, stop, if late, take care. */
+/** What to know about an entry besides its days, in the order look, last day, if late, stop, take care, who checked it. */
 export function entryDetails(model: SheetModel, entry: SheetEntry): { text: string; bold: boolean }[] {
   const { words } = model;
   const said = (text: string): boolean => text.trim() !== '';
@@ -124,7 +124,9 @@ export function entryDetails(model: SheetModel, entry: SheetEntry): { text: stri
     ...(said(entry.dateSetBy) ? [{ text: words.dateSetBy(entry.dateSetBy), bold: false }] : []),
     ...(entry.lastAdvised === null ? [] : [{ text: words.lastAdvised(entry.lastAdvised), bold: true }]),
     ...(said(entry.ifLate) ? [{ text: words.ifLate(entry.ifLate), bold: false }] : []),
+    ...(entry.stop ? [{ text: words.stopOn(entry.stop), bold: true }] : []),
     ...(said(entry.caution) ? [{ text: words.takeCare(entry.caution), bold: true }] : []),
+    ...(entry.checked ?? []).map((check) => ({ text: words.checkedBy(check), bold: false })),
   ];
 }
 

@@ -57,7 +57,21 @@ export interface SheetEntry {
   readonly signsNeeded: number | null;
   readonly ifLate: string;
   readonly caution: string;
+  /** The day on which to stop, and whose word that is. */
+  readonly stop?: { readonly date: string; readonly source: string } | null;
+  /** Who of which office read its texts; each office once. */
+  readonly checked?: readonly SheetCheck[];
   readonly whyNoDate: string | null;
+}
+
+export const CHECKED_TEXTS = ['work', 'safety', 'late'] as const;
+
+/** Which of an entry's texts somebody of an office read and let stand, and when. */
+export interface SheetCheck {
+  readonly texts: readonly (typeof CHECKED_TEXTS)[number][];
+  readonly office: string;
+  readonly name: string;
+  readonly date: string;
 }
 
 export type MoonPhase = 'new' | 'first-quarter' | 'full' | 'last-quarter';

@@ -151,7 +151,9 @@ function entryRow(model: SheetModel, entry: SheetEntry, measurer: TextMeasurer):
       late: [
         ...(entry.lastAdvised === null ? [] : [strong(words.lastAdvised(entry.lastAdvised))]),
         ...(said(entry.ifLate) ? [plain(entry.ifLate)] : []),
+        ...(entry.stop ? [strong(words.stopOn(entry.stop))] : []),
         ...(said(entry.caution) ? [strong(words.takeCare(entry.caution))] : []),
+        ...(entry.checked ?? []).map((check) => plain(words.checkedBy(check))),
       ],
     },
     measurer,

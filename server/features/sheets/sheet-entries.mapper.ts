@@ -4,7 +4,7 @@ import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
-import type { SheetEntry } from '#shared/sheet/sheet-model.js';
+import { CHECKED_TEXTS, type SheetCheck, type SheetEntry } from '#shared/sheet/sheet-model.js';
 import type { SheetWords } from '#shared/sheet/sheet-words.js';
 import type { Translate } from '../../print/translator.js';
 import { whyNoDate } from './why-no-date.js';
@@ -45,6 +45,8 @@ export function toSheetEntries(
       signsNeeded: content.record?.signs.needed ?? null,
       ifLate: lateSaid(content),
       caution: content.caution,
+      stop: stopOf(content, year),
+      checked: checksOf(content),
       whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
     }));
 }
@@ -112,6 +114,24 @@ function lastAdvisedOf({ content, dates: { window } }: Body, year: number): Shee
     date: window.lastAdvised,
     source: window.lastAdvisedBy === 'fixed' ? lastDate.source : '',
   };
+}
+
+function stopOf({ record }: EntryInput, year: number): NonNullable<SheetEntry['stop']> | null {
+  const stop = record?.work.stop ?? null;
+  return stop && { date: dateIn(year, stop.date), source: stop.source };
+}
+
+/** What one and the same person checked on one day is said once. */
+function checksOf({ record }: EntryInput): SheetCheck[] {
+  const found = new Map<string, SheetCheck>();
+  for (const text of CHECKED_TEXTS) {
+    const check = record?.checked[text] ?? null;
+    if (check === null) continue;
+    const { office, name, day: date } = check;
+    const key = JSON.stringify([office, name, date]);
+    found.set(key, { office, name, date, texts: [...(found.get(key)?.texts ?? []), text] });
+  }
+  return [...found.values()];
 }
 
 function reason({ content, dates }: Body, year: number, texts: EntryTexts): string | null {

@@ -1,3 +1,4 @@
+import { EMPTY_RECORD } from '#shared/contracts/event-record.js';
 import { describe, expect, it } from 'vitest';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
 import { toSheetModel, type SheetFacts } from '#server/features/sheets/sheet-model.mapper.js';
@@ -331,5 +332,40 @@ describe('the rest of the sheet', () => {
       'Burn: taken off the board',
     ]);
     expect(model([sow], { before: { label: '2027-1', entries: [sow] } })).not.toHaveProperty('changes');
+  });
+});
+
+describe('who checked an entry’s texts', () => {
+  const office = { office: 'Agricultural office', name: 'R. Ansel' };
+  const checkedOn = (work: string, late: string) => ({
+    ...EMPTY_RECORD,
+    checked: { work: { ...office, day: work }, safety: null, late: { ...office, day: late } },
+  });
+
+  it('is said once where it was one and the same person on one day', () => {
+    const [entry] = model([body({ record: checkedOn('2027-02-03', '2027-02-03') })]).entries;
+    expect(entry?.checked).toEqual([{ ...office, date: '2027-02-03', texts: ['work', 'late'] }]);
+  });
+
+  it('is said for each day, in words that name office, person and day', () => {
+    const sheet = model([body({ record: checkedOn('2027-02-03', '2026-11-20') })]);
+    expect((sheet.entries[0]?.checked ?? []).map((check) => sheet.words.checkedBy(check))).toEqual([
+      'Checked (work and days): R. Ansel, Agricultural office, 3\u00a0February\u00a02027.',
+      'Checked (if late): R. Ansel, Agricultural office, 20\u00a0November\u00a02026.',
+    ]);
+  });
+
+  it('is not spoken of where nobody checked anything', () => {
+    expect(model([body()]).entries[0]?.checked).toEqual([]);
+  });
+});
+
+describe('the day on which to stop', () => {
+  it('stands with whose word it is, in the calendar’s year', () => {
+    const stop = { date: { month: 7, day: 5 }, source: 'Agricultural office' };
+    const record = { ...EMPTY_RECORD, work: { ...EMPTY_RECORD.work, stop } };
+    const sheet = model([body({ record })]);
+    const printed = sheet.entries[0]?.stop;
+    expect(printed && sheet.words.stopOn(printed)).toBe('Stop on 5\u00a0July (Agricultural office).');
   });
 });
