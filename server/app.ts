@@ -45,6 +45,8 @@ import { LettersService } from './features/letters/letters.service.js';
 import { CommunitiesService } from './features/people/communities.service.js';
 import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
+import { weatherRoutes } from './features/weather/weather.routes.js';
+import { WeatherService } from './features/weather/weather.service.js';
 import { signsRoutes } from './features/signs/signs.routes.js';
 import { SignsService } from './features/signs/signs.service.js';
 import { figuresRoutes } from './features/figures/figures.routes.js';
@@ -228,6 +230,8 @@ export function createApp(options: AppOptions): App {
   const stars = new StarsService(places, skyYears);
   placesRoutes(mount, places);
   figuresRoutes(mount, new FiguresService(dataSource, clock));
+  const weather = new WeatherService(dataSource, clock);
+  weatherRoutes(mount, weather);
   signsRoutes(mount, new SignsService(dataSource, clock));
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));
@@ -276,7 +280,7 @@ export function createApp(options: AppOptions): App {
     new AttachmentWordsService(dataSource, clock),
   );
   const readBack = new ReadBackService(dataSource, contents, clock);
-  sheetsRoutes(mount, new SheetsService(contents, versions, clock), readBack);
+  sheetsRoutes(mount, new SheetsService(contents, versions, weather, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
   exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
   importsRoutes(

@@ -190,6 +190,8 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listPlaces: 'is places and their skylines',
   readPlace: 'is one place and its skyline',
   findTimeZone: 'is a name of a zone',
+  readWeather: 'is notices of an office and rain, which all of the village read',
+  listNotices: 'is notices of an office',
   listSkyMarkers: 'names signs of the Sun and of stars of the table',
   readChart: 'is stars of the table',
   listCalendars: 'counts what the person sees',

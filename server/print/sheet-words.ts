@@ -92,6 +92,8 @@ export function sheetWords({ translate: t, language, year, villageMonths }: Shee
         : t('entry.signsSome', { signs: end(signs), count: needed }),
     ifLate: (rule) => t('entry.ifLate', { rule: end(rule) }),
     takeCare: (caution) => t('entry.takeCare', { caution: end(caution) }),
+    notice: ({ text, issuer, issued, expires }) =>
+      t('notice', { issuer, issued: dayAndYear(issued), expires: dayAndYear(expires), text: end(text) }),
     stopOn: ({ date, source }) => t('entry.stopOn', { date: day(date), source: end(source) }),
     checkedBy: ({ texts, office, name, date }) =>
       t('entry.checkedBy', {

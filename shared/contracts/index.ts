@@ -34,6 +34,7 @@ import { todayEndpoints } from './today.js';
 import { actualDaysEndpoints } from './actual-days.js';
 import { variantsEndpoints } from './variants.js';
 import { withdrawalsEndpoints } from './withdrawals.js';
+import { weatherEndpoints } from './weather.js';
 import { versionsEndpoints } from './versions.js';
 
 /** Every operation of the API. The server mounts exactly these; OpenAPI and the permission table list them. */
@@ -73,5 +74,6 @@ export const ENDPOINTS: readonly Endpoint[] = [
   consentsEndpoints,
   auditEndpoints,
   todayEndpoints,
+  weatherEndpoints,
   lookEndpoints,
 ].flatMap((group) => Object.values(group) as Endpoint[]);

@@ -35,6 +35,7 @@ import { texts as stars } from './en/stars.js';
 import { texts as today } from './en/today.js';
 import { texts as variants } from './en/variants.js';
 import { texts as versions } from './en/versions.js';
+import { texts as weather } from './en/weather.js';
 import { texts as withdrawals } from './en/withdrawals.js';
 
 /**
@@ -64,6 +65,7 @@ export const en = {
   calendars,
   record,
   signs,
+  weather,
   reviews,
   rollovers,
   sharing,

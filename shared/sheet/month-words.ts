@@ -3,10 +3,10 @@ import { entryStretches, markerRange, touchesYear } from './spans.js';
 import type { SheetEntry, SheetMarker, SheetModel } from './sheet-model.js';
 import { joinLabel } from './text-layout.js';
 import type { TextMeasurer } from './text-layout.js';
-import { nameBlock, smallBlock } from './word-block.js';
+import { LEGEND_BOLD, nameBlock, plainBlock, smallBlock } from './word-block.js';
 import type { BlockArea, CardWords } from './word-block.js';
 
-/** The words of one month: what comes in it in large letters, what only begins or ends in it in a small list. */
+/** The words of one month: notices that hold in it, then what comes in it in large letters, what only begins or ends in it in a small list. */
 export function monthWords(
   model: SheetModel,
   month: number,
@@ -53,7 +53,11 @@ export function monthWords(
     small.push(smallBlock({ tag: String(entry.number), kind: 'entry' }, sentence, area, measurer));
   }
   entries.sort((a, b) => compare(a.date, b.date));
-  return [...names, ...entries.map(({ block }) => block), ...small];
+  const notices = (model.notices ?? [])
+    .filter(({ issued, expires }) => issued <= last && expires >= first)
+    .map((notice) => plainBlock(model.words.notice(notice), LEGEND_BOLD, area, measurer))
+    .map((block): CardWords => ({ short: block, full: block }));
+  return [...notices, ...names, ...entries.map(({ block }) => block), ...small];
 }
 
 /** What has no date in the sheet's year, each with the reason in plain words. */

@@ -81,6 +81,15 @@ export interface SheetMoon {
   readonly date: string;
 }
 
+/** What the weather service says on the day of printing. */
+export interface SheetNotice {
+  readonly text: string;
+  readonly issuer: string;
+  readonly issued: string;
+  /** The last day on which it holds. */
+  readonly expires: string;
+}
+
 export interface SheetModel {
   readonly layout: SheetLayout;
   readonly paper: 'A4';
@@ -99,6 +108,8 @@ export interface SheetModel {
   readonly villageLanguage: string;
   readonly markers: readonly SheetMarker[];
   readonly entries: readonly SheetEntry[];
+  /** They stand above the work of the months in which they hold. */
+  readonly notices?: readonly SheetNotice[];
   readonly moon: readonly SheetMoon[];
   /** Days on which a Moon's days begin to be counted, in order, from the one before the year on; empty for none. */
   readonly moonBegins: readonly string[];

@@ -1,4 +1,4 @@
-import type { Label, MoonPhase, SheetCheck } from './sheet-model.js';
+import type { Label, MoonPhase, SheetCheck, SheetNotice } from './sheet-model.js';
 
 /**
  * Every fixed word of a sheet, already in the officer's language. The geometry asks for sentences by what
@@ -47,6 +47,7 @@ export interface SheetWords {
   signs(of: { signs: string; needed: number | null }): string;
   ifLate(rule: string): string;
   takeCare(caution: string): string;
+  notice(notice: SheetNotice): string;
   stopOn(of: { date: string; source: string }): string;
   checkedBy(check: SheetCheck): string;
   noDateBecause(of: { title: string; reason: string }): string;

@@ -37,6 +37,9 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
   const foot = pageFoot(model, AREA, model.markers.length > 0, MAX_FOOT_MM, measurer);
   const footTop = TILE_PAGE_HEIGHT_MM - 8 - foot.height;
   const blocks = [
+    ...(model.notices ?? []).map((notice) =>
+      plainBlock(model.words.notice(notice), LEGEND_BOLD, AREA, measurer),
+    ),
     ...model.markers.map((marker) => markerRow(model, marker, measurer)),
     ...model.entries.map((entry) => entryRow(model, entry, measurer)),
     ...changeBlocks(model, measurer),

@@ -10,6 +10,7 @@ test.use({ actionTimeout: 15_000 });
 
 const PHONE = { width: 320, height: 640 };
 const ENTRY = 'Plant the watered strip';
+const NOTICE = 'Frost in the lowest terraces on three nights. Cover what is up.';
 const SIGNS = ['Soil breaks in the hand', 'Swallows over the water'];
 
 test('an officer lets an entry wait for two signs of the village’s list', async ({ page }) => {
@@ -47,6 +48,37 @@ test('an officer lets an entry wait for two signs of the village’s list', asyn
   await expect(page.getByText(`Saved: ${ENTRY}.`)).toBeVisible();
   await expect(page.getByText('Prepare.', { exact: true })).toBeVisible();
   await expect(page.getByRole('img', { name: '0 signs of 2 are in' })).toBeVisible();
+});
+
+test('a notice of the weather service stands above the work, the rain beside it', async ({ page }) => {
+  test.setTimeout(90_000);
+  await page.setViewportSize(PHONE);
+  await signIn(page, 'officer2');
+  await page.goto('/');
+  await page.getByRole('button', { name: 'Write down a notice' }).click();
+  const dialog = page.getByRole('dialog');
+  await dialog.getByLabel('What it says').fill(NOTICE);
+  await dialog.getByLabel('Who issued it').fill('Mountain weather service');
+  await dialog.getByLabel('Holds until').fill('2027-03-14');
+  await expectAccessible(page);
+  await dialog.getByRole('button', { name: 'Show the notice' }).click();
+  await expect(page.getByRole('note', { name: 'Notice of Mountain weather service' })).toContainText(NOTICE);
+
+  await page.getByRole('button', { name: 'Write down rain' }).click();
+  await page.getByRole('dialog').getByLabel('In words').fill('wet to a finger depth');
+  await page.getByRole('dialog').getByRole('button', { name: 'Keep it' }).click();
+  await expect(page.getByText(/^10.March: wet to a finger depth/u)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await expectAccessible(page);
+
+  await openEntry(page);
+  const notice = page.getByRole('note', { name: 'Notice of Mountain weather service' });
+  const heading = page.getByRole('heading', { name: ENTRY });
+  await expect(heading).toBeVisible();
+  await expect(async () => {
+    const [above, below] = [await notice.boundingBox(), await heading.boundingBox()];
+    expect(above?.y ?? Infinity).toBeLessThan(below?.y ?? 0);
+  }).toPass();
 });
 
 test('an observer marks them as seen on a small phone, and takes a slip back', async ({ page }) => {

@@ -9,6 +9,7 @@ import { DEMO_PASSWORD } from '#server/features/demo/demo-villages.data.js';
 import { entryInput, says } from '#tests/support/calendar-api.js';
 import { asked, spokenContent } from '#tests/support/consent-api.js';
 import { attachmentInput } from '#tests/support/attachment-api.js';
+import { noticeInput } from '#tests/support/weather-api.js';
 import { signInput } from '#tests/support/sign-api.js';
 import { figureInput } from '#tests/support/figure-api.js';
 
@@ -69,6 +70,8 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
     figureId: village.figureId,
     signId: village.signId,
     seenId: village.seenId,
+    noticeId: randomUUID(),
+    rainId: randomUUID(),
     attachmentId: village.attachmentId,
     part: '1',
     groupId: village.groupId,
@@ -144,6 +147,8 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     createPlace: () => place,
     updatePlace: () => ({ ...place, ...stale }),
     createFigure: () => figureInput(),
+    addNotice: () => noticeInput(),
+    addRain: () => ({ day: '2026-11-29', mm: 3, words: '' }),
     addSign: () => signInput(),
     updateSign: () => ({ ...signInput(), ...stale }),
     markSignSeen: () => ({ day: '2026-11-29', who: 'Tirel' }),

@@ -36,6 +36,8 @@ import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
 import { SignEntity } from './sign.entity.js';
 import { SignSightingEntity } from './sign-sighting.entity.js';
+import { RainDayEntity } from './rain-day.entity.js';
+import { WeatherNoticeEntity } from './weather-notice.entity.js';
 import { ActualDateEntity } from './actual-date.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
 import { WriteKeyEntity } from './write-key.entity.js';
@@ -52,6 +54,8 @@ export const ENTITIES = [
   FigureEntity,
   SignEntity,
   SignSightingEntity,
+  WeatherNoticeEntity,
+  RainDayEntity,
   CalendarEntity,
   EntryEntity,
   DeathEntity,

@@ -20,6 +20,7 @@ import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.js';
 import { Signs1799000000000 } from './1799000000000-signs.js';
+import { Weather1799000100000 } from './1799000100000-weather.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
@@ -48,6 +49,7 @@ export const MIGRATIONS = [
   Rollovers1798800000000,
   CalendarImports1798900000000,
   Signs1799000000000,
+  Weather1799000100000,
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
   WriteKeys1799200000000,

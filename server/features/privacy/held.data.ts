@@ -49,6 +49,8 @@ export const HELD: Readonly<Record<string, Held>> = {
   rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   sign: row('knowledge', ['updated_by'], ['id', 'updated_at']),
+  weather_notice: row('knowledge', ['written_by'], ['id', 'issued_on', 'written_at']),
+  rain_day: row('knowledge', ['written_by'], 'all'),
   sign_sighting: row('knowledge', ['marked_by'], 'all'),
   item_sharing: row('knowledge', ['giver_id'], 'all'),
   version_entry: row('knowledge', [], []),

@@ -1,7 +1,8 @@
+import type { Notice } from '#shared/contracts/weather.js';
 import type { SheetQuery } from '#shared/contracts/sheets.js';
 import type { VersionEntryBody, VersionHeader, VersionState } from '#shared/contracts/versions.js';
 import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
-import type { SheetModel, SheetMoon } from '#shared/sheet/sheet-model.js';
+import type { SheetModel, SheetMoon, SheetNotice } from '#shared/sheet/sheet-model.js';
 import { dayNumberOf, isoDateOf } from '#shared/kernel/iso-date.js';
 import { civilDayOf, moonPhases, moonsBetween } from '#shared/sky/index.js';
 import { sheetWords } from '../../print/sheet-words.js';
@@ -25,6 +26,8 @@ export interface SheetFacts {
   signerNames: readonly string[];
   /** Civil day at the place, `YYYY-MM-DD`. */
   printDate: string;
+  /** Of the weather service, as they hold on that day. */
+  notices?: readonly Notice[];
   /** The board that this one replaces in the same year. */
   before?: SheetBefore | undefined;
 }
@@ -58,10 +61,15 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
     basis: [basisOf(header, files)],
     ...(changes.length > 0 && { changes }),
+    ...(facts.notices && { notices: facts.notices.map(toSheetNotice) }),
     signedBy: listOf(facts.signerNames, language),
     printDate: facts.printDate,
     words,
   };
+}
+
+function toSheetNotice({ text, issuer, issuedOn, expiresOn }: Notice): SheetNotice {
+  return { text: text.replaceAll(/\s+/gu, ' '), issuer, issued: issuedOn, expires: expiresOn };
 }
 
 /** The fixed words are printed in the officer's language where we have its texts, months and all, else in English. */

@@ -11,6 +11,7 @@ import { translatorFor } from '../../print/translator.js';
 import { civilDateAt } from '../places/place-day.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import type { VersionsService } from '../versions/versions.service.js';
+import type { WeatherService } from '../weather/weather.service.js';
 import type { SheetBefore } from './sheet-changes.mapper.js';
 import { toSheetModel } from './sheet-model.mapper.js';
 
@@ -19,6 +20,7 @@ export class SheetsService {
   constructor(
     private readonly contents: FrozenContentService,
     private readonly versions: VersionsService,
+    private readonly weather: WeatherService,
     private readonly clock: Clock,
   ) {}
 
@@ -56,6 +58,7 @@ export class SheetsService {
     const { header, entries, state, label } = await this.contents.readForBoard(actor, calendarId, number);
     const signatures =
       number === 'draft' ? [] : (await this.versions.read(actor, calendarId, Number(number))).signatures;
+    const printDate = civilDateAt(this.clock.now(), header.place);
     return toSheetModel(
       {
         header,
@@ -63,7 +66,8 @@ export class SheetsService {
         state,
         label,
         signerNames: signerNames(signatures),
-        printDate: civilDateAt(this.clock.now(), header.place),
+        printDate,
+        notices: await this.weather.noticesOn(actor.communityId, printDate),
         before: label === null ? undefined : await this.before(actor, calendarId, Number(number)),
       },
       query,

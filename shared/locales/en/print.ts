@@ -53,6 +53,7 @@ export const texts = {
     noDateUntitled: 'No date this year.',
     noDateBecause: '{{title}}: {{reason}}',
   },
+  notice: 'Notice of {{issuer}}, {{issued}}, holds until {{expires}}: {{text}}.',
   legend: {
     title: 'What stands on the board',
     best: 'best days',

@@ -69,6 +69,7 @@ export const texts = {
     'not-yourself': 'Nobody makes themselves an elder. Ask another steward or the elders.',
     'figure-in-use':
       'Entries of a draft go by this figure. Let them go by something else first, then take it out.',
+    'too-many-notices': 'As many notices hold as can stand above the work. Take one down first.',
     'sign-in-use': 'Entries of a draft wait for this sign. Take it out of them first, then out of the list.',
     'sign-is-there': 'This sign stands in the list already.',
     'too-many-signs': 'A village keeps at most 200 signs. Take one out that nobody needs.',
@@ -155,6 +156,12 @@ export const texts = {
       'These entries would wait for each other in a circle. Let one of them go by something else.',
     'anchor-kept':
       'Fewer people see that entry than this one: its days would tell of it. Choose another, or keep this one in the same circle.',
+    'before-issued': 'It cannot end before it was issued.',
+    'expired-already': 'This day is over, so the notice would never be shown.',
+    'holds-too-long': 'A notice holds for 200 days at most. Write an earlier day.',
+    'rain-range': 'Rain of a day is from 0 to 2000 millimetres.',
+    'rain-said': 'Write how much it was, or say it in words.',
+    'rain-of-day-there': 'You have written down the rain of this day. Take that out first.',
     'unknown-sign': 'This sign is not in the village’s list any more. Choose another one.',
     'sign-kept':
       'Fewer people see that sign than this entry, which would tell of it. Choose another, or write one of its own.',

@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
+import { NoticesAbove } from '#src/lib/notices-above.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
@@ -36,6 +37,7 @@ export function CalendarsPage({ next }: CalendarsPageProps) {
   return (
     <Page>
       <Mast title={t('list.title')} under={t('list.under', { village: communityName })} />
+      <NoticesAbove />
       {wanted !== null && <ChooseForMarker wanted={wanted} calendars={list} />}
       <Columns wider="first">
         <div className="grid gap-4">

@@ -1,6 +1,7 @@
 import { Plus } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { NoticesAbove } from '#src/lib/notices-above.js';
 import { paths } from '#src/lib/paths.js';
 import { Button } from '#src/ui/button.js';
 import { Mast, Page, ThumbBar } from '#src/ui/page.js';
@@ -118,6 +119,7 @@ export function EntryView(parts: ViewParts) {
 function Notes({ editor, lockedAction }: ViewParts) {
   return (
     <>
+      <NoticesAbove />
       {editor.calendar.locked && (
         <LockedNote
           calendar={editor.calendar}

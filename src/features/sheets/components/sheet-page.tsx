@@ -8,6 +8,7 @@ import { calendarQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { useRoles } from '#src/lib/community.js';
 import { listWords } from '#src/lib/list-words.js';
 import { usePageTitle } from '#src/lib/page-title.js';
+import { NoticesAbove } from '#src/lib/notices-above.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
@@ -111,6 +112,7 @@ function SheetDesk({
   return (
     <>
       {mast(true)}
+      <NoticesAbove />
       <div className="sheet-desk">
         <div className="grid content-start gap-4">
           <Board title={t('what')}>

@@ -22,14 +22,15 @@ import { WaitingBoard } from './waiting-board.js';
 import { WatchCard } from './watch-card.js';
 
 interface TodayPageProps {
-  /** Boards of other features: what waits for a word, what must come down, signs of nature. */
+  /** Boards of other features: what waits for a word, what must come down, signs of nature, rain. */
   asked: ReactNode;
   urgent?: ReactNode;
   signs?: ReactNode;
+  weather?: ReactNode;
 }
 
 /** What waits for the person, the peg, and what to look for. Who comes in for one task is led on to it. */
-export function TodayPage({ asked, urgent, signs }: TodayPageProps) {
+export function TodayPage({ asked, urgent, signs, weather }: TodayPageProps) {
   const { t } = useTranslation(['today', 'common']);
   const { communityId, communityName } = useCurrentCommunity();
   const { place, isLoading } = useCurrentPlace();
@@ -58,7 +59,7 @@ export function TodayPage({ asked, urgent, signs }: TodayPageProps) {
         <TroubleNote sentence={words.problem(today.error)} onRetry={() => void today.refetch()} />
       )}
       {urgent}
-      {data && <TodayBoards data={data} asked={asked} signs={signs} />}
+      {data && <TodayBoards data={data} asked={asked} signs={signs} weather={weather} />}
     </Page>
   );
 }
@@ -69,7 +70,9 @@ function useHasJustCome(): boolean {
   return location.key === 'default' || hasArrived(location.state);
 }
 
-function TodayBoards({ data, asked, signs }: { data: Today; asked: ReactNode; signs: ReactNode }) {
+type TodayBoardsProps = Omit<TodayPageProps, 'urgent'> & { data: Today };
+
+function TodayBoards({ data, asked, signs, weather }: TodayBoardsProps) {
   const { t } = useTranslation('today');
   const { is } = useRoles();
   const { place } = useCurrentPlace();
@@ -101,6 +104,7 @@ function TodayBoards({ data, asked, signs }: { data: Today; asked: ReactNode; si
               <PegBoard today={data} />
               {signs}
               {watch}
+              {weather}
             </div>
           </>
         ) : (
@@ -109,6 +113,7 @@ function TodayBoards({ data, asked, signs }: { data: Today; asked: ReactNode; si
               <PegBoard today={data} />
               {signs}
               {watch}
+              {weather}
             </div>
             <div className="grid content-start gap-4">
               {waiting}

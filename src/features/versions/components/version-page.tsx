@@ -14,6 +14,7 @@ import { calendarQuery, versionQuery, versionsQuery } from '#src/lib/calendar-qu
 import { useDateWords } from '#src/lib/date-words.js';
 import { EntryTitles, titlesOf } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
+import { NoticesAbove } from '#src/lib/notices-above.js';
 import { paths } from '#src/lib/paths.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
 import { ButtonLink } from '#src/ui/button.js';
@@ -79,6 +80,7 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
         }
         backTo={paths.versions(calendarId)}
       />
+      <NoticesAbove />
       <Columns wider="first" className="mb-4">
         <StateBoard version={version} older={older} mayRestore={isOfficer && !isOpen} />
         {isOpen ? <MissingBoard version={version} /> : <SignaturesBoard version={version} />}
