@@ -30,6 +30,9 @@ export const CONSENTS = [
   'yes',
   'only to be shown',
   'only to be kept',
+  'no answer yet',
+  'refused',
+  'lapsed',
   'taken back',
   'paused',
 ] as const;
@@ -70,9 +73,11 @@ export function isOfCircle(
   return CIRCLES[season === 'outside' ? 'sealed' : level].includes(person);
 }
 
-/** Kept but not to be shown, taken back or paused: nobody sees it, its giver included. */
+const HIDING: readonly ConsentGiven[] = ['only to be kept', 'refused', 'lapsed', 'taken back', 'paused'];
+
+/** Kept but not to be shown, a no, a yes that has ended or was taken back, paused: nobody sees it, its giver included. */
 export function isHidden({ consent }: Pick<Combination, 'consent'>): boolean {
-  return consent === 'only to be kept' || consent === 'taken back' || consent === 'paused';
+  return HIDING.includes(consent);
 }
 
 export function sees(person: Someone, thing: Combination): boolean {
@@ -91,5 +96,5 @@ export function isOnBoard({ level, season, consent }: Combination): boolean {
 
 /** Voices and pictures themselves, where somebody was asked, need a yes of their own; whoever brought them has them. */
 export function mayBeOpened(person: Someone, { consent }: Combination): boolean {
-  return consent !== 'only to be shown' || person === 'giver';
+  return (consent !== 'only to be shown' && consent !== 'no answer yet') || person === 'giver';
 }

@@ -64,7 +64,16 @@ const USES: Readonly<Partial<Record<ConsentGiven, readonly ConsentUse[]>>> = {
   yes: CONSENT_USES,
   'only to be shown': ['keep', 'show'],
   'only to be kept': ['keep'],
+  'no answer yet': [],
+  refused: [],
+  lapsed: CONSENT_USES,
   'taken back': CONSENT_USES,
+};
+
+const SAID: Readonly<Partial<Record<ConsentGiven, Partial<ConsentContent>>>> = {
+  'no answer yet': { answer: 'asked', proof: null, naming: null },
+  refused: { answer: 'refused', naming: null },
+  lapsed: { askedOn: '2026-06-01', until: '2026-11-30' },
 };
 
 /** Brings a thing from "nobody asked" to what the combination says; answers with the consent's id, if there is one. */
@@ -81,7 +90,7 @@ export async function settleConsent(
   }
   const uses = USES[consent];
   if (uses === undefined) return null;
-  const given = { ...words, giverId: giver.personId, uses: [...uses] };
+  const given = { ...words, ...SAID[consent], giverId: giver.personId, uses: [...uses] };
   const { id, version } = await addConsent(giver, itemType, itemId, given);
   if (consent === 'taken back') {
     await giver.post(consentsPath(giver, id, '/withdrawal'), { version }).expect(200);

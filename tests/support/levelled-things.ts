@@ -1,7 +1,7 @@
 import type { FigureInput } from '#shared/contracts/figures.js';
 import type { VariantInput } from '#shared/contracts/variants.js';
 import sharp from 'sharp';
-import type { Combination } from '../../docker-free-scripts/lib/visibility-rules.js';
+import { CONSENTS, type Combination } from '../../docker-free-scripts/lib/visibility-rules.js';
 import { addPicture, addRecording } from './attachment-api.js';
 import type { Client, TestApi } from './api.js';
 import { setRoles } from './calendar-api.js';
@@ -16,7 +16,7 @@ import { addVariant } from './variant-api.js';
 const PLAIN: Combination = { level: 'village', season: 'none', consent: 'nobody asked' };
 export const plainAt = (level: Combination['level']): Combination => ({ ...PLAIN, level });
 export const VILLAGE_THINGS: readonly Combination[] = [
-  ...(['yes', 'only to be shown', 'only to be kept', 'taken back', 'paused'] as const).map((consent) => ({
+  ...CONSENTS.filter((consent) => consent !== 'nobody asked').map((consent) => ({
     ...PLAIN,
     consent,
   })),
