@@ -110,6 +110,8 @@ import { CardSignInService } from './features/cards/card-sign-in.service.js';
 import { cardsRoutes } from './features/cards/cards.routes.js';
 import { CardsService } from './features/cards/cards.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
+import { decadesRoutes } from './features/decades/decades.routes.js';
+import { DecadesService } from './features/decades/decades.service.js';
 import { RestoringService } from './features/versions/restoring.service.js';
 import { WhyMovedService } from './features/versions/why-moved.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
@@ -253,6 +255,7 @@ export function createApp(options: AppOptions): App {
   const stopWatching = onCommittedWrite(dataSource, (communityId) => {
     mount.streams.wake(communityId);
   });
+  decadesRoutes(mount, new DecadesService(dataSource, contents, sky));
   const whyMoved = new WhyMovedService(sky);
   rolloversRoutes(mount, new RolloversService(dataSource, clock, sky, whyMoved));
   notesRoutes(mount, new NotesService(dataSource, clock));

@@ -131,6 +131,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   readRollover: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
+  readLongLook: { entry: sees, 'led entry': sees, 'later entry': keptSeen },
   listAnswers: { answer: keptSeen },
   readOwnEntries: {
     ...{ entry: theirs, 'led entry': sees, 'kept variant': theirs, figure: leading },

@@ -7,6 +7,7 @@ import { calendarsEndpoints } from './calendars.js';
 import { consentsEndpoints } from './consents.js';
 import { cardsEndpoints } from './cards.js';
 import { draftChangesEndpoints } from './draft-changes.js';
+import { decadesEndpoints } from './decades.js';
 import { driftEndpoints } from './drift.js';
 import { exportsEndpoints } from './exports.js';
 import { finderEndpoints } from './finder.js';
@@ -59,6 +60,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   calendarsEndpoints,
   draftChangesEndpoints,
   actualDaysEndpoints,
+  decadesEndpoints,
   rolloversEndpoints,
   variantsEndpoints,
   versionsEndpoints,

@@ -6,6 +6,7 @@ import { texts as calendars } from './en/calendars.js';
 import { texts as cards } from './en/cards.js';
 import { texts as common } from './en/common.js';
 import { texts as consents } from './en/consents.js';
+import { texts as decades } from './en/decades.js';
 import { texts as drift } from './en/drift.js';
 import { texts as exports } from './en/exports.js';
 import { texts as figures } from './en/figures.js';
@@ -55,6 +56,7 @@ export const en = {
   places,
   stars,
   finder,
+  decades,
   drift,
   exports,
   imports,

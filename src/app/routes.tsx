@@ -121,6 +121,11 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['imports', 'exports', 'files', 'calendars', 'sky'],
     load: () => import('./routes/moves.js'),
   },
+  {
+    path: PATTERNS.longLook,
+    texts: ['decades', 'calendars', 'sky'],
+    load: () => import('./routes/long-look.js'),
+  },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },
   {
     path: PATTERNS.review,

@@ -42,6 +42,7 @@ export const PATTERNS = {
   meeting: '/calendars/:calendarId/versions/:number/meeting',
   compare: '/calendars/:calendarId/compare',
   rollover: '/calendars/:calendarId/rollover',
+  longLook: '/calendars/:calendarId/long-look',
   moves: '/calendars/:calendarId/moves',
   sheet: '/calendars/:calendarId/sheet',
   takeBack: '/take-back/:communityId/:itemType/:itemId',
@@ -135,6 +136,9 @@ export const paths = {
   rollover: (calendarId: string) => `${calendarPath(calendarId)}/rollover`,
   /** What is taken along of a draft and brought into it. */
   moves: (calendarId: string) => `${calendarPath(calendarId)}/moves`,
+  /** Ten years of it in one view. */
+  longLook: (calendarId: string, query: { from?: number; number?: string } = {}) =>
+    withQuery(`${calendarPath(calendarId)}/long-look`, query),
   sheet: (calendarId: string, query: { number?: VersionNumber } = {}) =>
     withQuery(`${calendarPath(calendarId)}/sheet`, query),
   takeBack: (communityId: string, itemType: SharedItemType, itemId: string) =>

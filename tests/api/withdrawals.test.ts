@@ -209,6 +209,7 @@ describe('a withdrawn entry', () => {
       },
       queries: {
         compareVersions: ['?from=1&to=draft'],
+        readLongLook: ['?from=2027&years=1&number=1', '?from=2027&years=1&number=draft'],
         readFeed: [`?key=${feedKey}`],
         listAttachments: [`?subjectType=entry&subjectId=${entry.id}`],
         listAuditEvents: ['?limit=200'],

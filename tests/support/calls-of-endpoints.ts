@@ -98,6 +98,7 @@ export function queryOf(endpoint: Endpoint, { publishedNumber, figureId, feedKey
     listSkylineEffects: '?year=2027',
     findMarkers: '?year=2027&from=06-10',
     readDrift: '?from=1500&to=2027',
+    readLongLook: '?from=2027&years=2',
     exportDriftCsv: '?from=1500&to=2027',
     readLook: '?marker=pleiades&date=2027-06-10',
     printLook: '?marker=pleiades&date=2027-06-10',

@@ -217,6 +217,7 @@ export async function furnishLevels(
       exportMoonsCsv: moonsBy(askedFigures),
       findMarkers: ['?year=2027&from=06-10'],
       readDrift: ['?from=1500&to=2027'],
+      readLongLook: [...numbers, 'draft'].map((number) => `?from=2027&years=1&number=${number}`),
       exportDriftCsv: ['?from=1500&to=2027'],
       readLook: askedFigures.map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),
       printLook: askedFigures.map(({ markerKey }) => `?marker=${markerKey}&date=2027-06-10`),

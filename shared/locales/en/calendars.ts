@@ -72,6 +72,7 @@ export const texts = {
   },
 
   list: {
+    longLook: 'Ten years at once',
     title: 'Calendars',
     under: '{{village}}',
     yearAtPlace: '{{year}}, {{place}}',

@@ -202,6 +202,7 @@ export const texts = {
     'full-turn-differs': '0 and 360 degrees are the same point: give both the same altitude.',
     'too-many-points': 'A skyline holds at most 361 points. Take some out.',
     'shift-range': 'A shift lies between −6 and 6 degrees.',
+    'years-range': 'One to twenty years at once.',
     'year-range': 'The engine knows the years from −3000 to 3000.',
     'calendar-year': 'Calendars are made for the years 1900 to 2200.',
     'no-such-day': 'This month has no such day. For the end of February write the 28th.',

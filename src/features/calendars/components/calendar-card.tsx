@@ -73,6 +73,11 @@ export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted,
         <Link className="link-line" to={paths.versions(id)}>
           {t('list.versions')}
         </Link>
+        {(seesDrafts || published !== null) && (
+          <Link className="link-line" to={paths.longLook(id)}>
+            {t('list.longLook')}
+          </Link>
+        )}
         {published !== null && (
           <Link className="link-line" to={paths.sheet(id, { number: published.number })}>
             <Printer aria-hidden size={20} />
