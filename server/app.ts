@@ -32,6 +32,7 @@ import { ExportsService } from './features/exports/exports.service.js';
 import { FeedsService } from './features/exports/feeds.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
+import { CopyingService } from './features/imports/copying.service.js';
 import { FileImportService } from './features/imports/file-import.service.js';
 import { TableImportService } from './features/imports/table-import.service.js';
 import { importsRoutes } from './features/imports/imports.routes.js';
@@ -286,11 +287,11 @@ export function createApp(options: AppOptions): App {
   sheetsRoutes(mount, new SheetsService(contents, versions, weather, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
   exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
-  importsRoutes(
-    mount,
-    new FileImportService(dataSource, clock, options.withdrawals),
-    new TableImportService(dataSource, clock, sky),
-  );
+  importsRoutes(mount, {
+    files: new FileImportService(dataSource, clock, options.withdrawals),
+    tables: new TableImportService(dataSource, clock, sky),
+    copying: new CopyingService(dataSource, clock, sky, contents),
+  });
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

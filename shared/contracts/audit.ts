@@ -71,6 +71,7 @@ export const AUDIT_ACTIONS = [
   'calendar-rolled-over',
   'draft-restored',
   'entries-brought-in',
+  'entries-copied-away',
   'entry-added',
   'entry-changed',
   'entry-copied',

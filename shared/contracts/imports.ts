@@ -86,6 +86,33 @@ export type ReadLine = z.infer<typeof readLine>;
 export const tableImport = z.strictObject({ added: z.number().int(), lines: z.array(readLine) });
 export type TableImport = z.infer<typeof tableImport>;
 
+/** What copying changed in an entry, because the other village is another one. */
+export const COPY_NOTES = [
+  'star-instead-of-figure',
+  'figure-left-out',
+  'skyline-left-out',
+  'anchor-left-out',
+  'last-date-dropped',
+  'timings-dropped',
+  'seen-dropped',
+] as const;
+export type CopyNote = (typeof COPY_NOTES)[number];
+
+export const villageCopy = z.strictObject({
+  added: z.number().int(),
+  entries: z.array(
+    z.strictObject({
+      title: z.string(),
+      protectiveWatch: z.boolean(),
+      comes: z.boolean(),
+      /** At the other place; null where it does not come, or has no day there. */
+      window: entryWindow.nullable(),
+      notes: z.array(z.enum(COPY_NOTES)),
+    }),
+  ),
+});
+export type VillageCopy = z.infer<typeof villageCopy>;
+
 const params = z.strictObject({ calendarId: id });
 
 /** What is brought into a draft. All of it lands as a draft, or nothing does. */
@@ -111,5 +138,16 @@ export const importsEndpoints = {
     params,
     body: tableInput,
     response: tableImport,
+  }),
+  copy: defineEndpoint({
+    id: 'copyCalendar',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/copies',
+    summary:
+      'Copy the draft into a draft of another village of the same officer; with dryRun nothing is kept',
+    access: member('calendar', 'officer'),
+    params,
+    body: z.strictObject({ key, dryRun: z.boolean(), toCalendarId: id }),
+    response: villageCopy,
   }),
 } as const;

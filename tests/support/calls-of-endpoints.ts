@@ -179,6 +179,8 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
       ...{ key: randomUUID(), dryRun: true, dayOrder: null },
       lines: [{ line: 2, cells: { titleOfficer: 'Mend', kind: 'farm', bestFrom: '06-07' } }],
     }),
+    // To itself, which is refused once somebody may copy at all.
+    copyCalendar: () => ({ key: randomUUID(), dryRun: true, toCalendarId: village.calendarId }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
     addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),

@@ -25,6 +25,7 @@ import { knowsMarker, markerKeyOfLead } from '../calendars/sky-dates.service.js'
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { readCalendarFile } from './calendar-file-reader.js';
 import { filePlan, type FilePlan, type KnownToday } from './file-plan.js';
+import { withSignsOfToday } from './village-signs.service.js';
 import { landOnce } from './landing.service.js';
 
 /** A calendar's own file, back in a draft of its village. */
@@ -57,13 +58,13 @@ export class FileImportService {
       return { added: entries.length, refused, from };
     }
     const at = this.clock.now();
-    const landed = await inTransaction(this.dataSource, (manager) =>
+    const { added, refused } = await inTransaction(this.dataSource, (manager) =>
       landOnce(manager, actor, calendarId, { key, at }, async ({ year }) => ({
         ...(await this.plan(manager, actor, year, file, listed)),
         way: 'file',
       })),
     );
-    return { ...landed, from };
+    return { added, refused, from };
   }
 
   private async expectOfVillage({ communityId }: Actor, { source, header }: CalendarFile): Promise<void> {
@@ -80,7 +81,9 @@ export class FileImportService {
     file: CalendarFile,
     listed: ReadonlySet<string>,
   ): Promise<FilePlan> {
-    return filePlan(file, await this.today(manager, actor, year, file, listed));
+    const plan = filePlan(file, await this.today(manager, actor, year, file, listed));
+    const viewer = await viewerOf(manager, actor, this.clock.now());
+    return { ...plan, entries: await withSignsOfToday(manager, viewer, plan.entries) };
   }
 
   private async today(

@@ -1,15 +1,18 @@
 import { ENTRIES_MAX, type EntryInput } from '#shared/contracts/calendars.js';
 import type { VariantInput } from '#shared/contracts/variants.js';
+import { randomUUID } from 'node:crypto';
 import type { EntityManager } from 'typeorm';
 import { CalendarImportEntity } from '../../db/entities/calendar-import.entity.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { ConsentEntity, type ConsentDetails } from '../../db/entities/consent.entity.js';
 import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { RolledItemEntity } from '../../db/entities/rolled-item.entity.js';
 import type { Actor } from '../../http/actor.js';
 import { AppError, conflict } from '../../http/app-error.js';
 import { copySharing, insertSharing } from '../../policy/sharing.repository.js';
-import { viewerOf } from '../../policy/viewer.js';
+import { settleShownUntil } from '../../policy/consent.repository.js';
+import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
 import { liveEntries, writeOrder } from '../calendars/calendars.repository.js';
@@ -24,10 +27,14 @@ export interface LandingEntry {
   content: EntryInput;
   /** The same thing in another draft of this village: its level, giver and consents go along, and so does taking it back. */
   sameAs: string | null;
+  /** Somebody has to be asked before it is used: a consent that nobody has answered yet says so. */
+  isToBeAsked?: boolean;
   variants: readonly { id: string; content: VariantInput; sameAs: string }[];
 }
 
 export interface Landed {
+  /** False where the same key had come before. */
+  isNew: boolean;
   added: number;
   refused: number;
 }
@@ -53,17 +60,17 @@ export async function landOnce(
   const known = await manager.findOneBy(CalendarImportEntity, { importKey: key });
   if (known !== null) {
     if (known.calendarId !== calendarId || known.broughtBy !== actor.person.id) throw conflict('key-used');
-    return { added: known.added, refused: known.refused };
+    return { isNew: false, added: known.added, refused: known.refused };
   }
   if (calendar.outNumber !== null) throw new AppError('draft-locked');
   const landing = await prepare(calendar);
   await land(manager, actor, calendar, landing, at);
-  const landed = { added: landing.entries.length, refused: landing.refused };
+  const counts = { added: landing.entries.length, refused: landing.refused };
   await manager.insert(CalendarImportEntity, {
     ...{ importKey: key, calendarId, broughtBy: actor.person.id, broughtAt: at },
-    ...landed,
+    ...counts,
   });
-  return landed;
+  return { isNew: true, ...counts };
 }
 
 async function land(
@@ -78,7 +85,7 @@ async function land(
   if (before.length + entries.length > ENTRIES_MAX) throw conflict('too-many-entries');
   const { communityId, person } = actor;
   const touched = { updatedBy: person.id, updatedAt: at };
-  for (const [index, { id, content, sameAs, variants }] of entries.entries()) {
+  for (const [index, { id, content, sameAs, variants, isToBeAsked }] of entries.entries()) {
     const position = before.length + index;
     await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
     if (sameAs === null) {
@@ -91,6 +98,7 @@ async function land(
         giverId,
       });
     } else await goAlong(manager, 'entry', calendarId, sameAs, id);
+    if (isToBeAsked === true) await ask(manager, actor, { id, content }, at);
     for (const variant of variants) {
       await manager.insert(EntryVariantEntity, {
         ...{ id: variant.id, entryId: id, content: variant.content, addedAt: at },
@@ -122,6 +130,30 @@ async function expectAnchored(
     await expectGoodAnchor(manager, viewer, calendarId, { id, content }, field);
   }
 }
+
+/** Nobody in particular is named: whoever is to be asked is found out by whoever asks. */
+async function ask(
+  manager: EntityManager,
+  { communityId, person }: Actor,
+  { id: itemId, content }: Pick<LandingEntry, 'id' | 'content'>,
+  at: Date,
+): Promise<void> {
+  const today = await villageDay(manager, communityId, at);
+  await manager.insert(ConsentEntity, {
+    ...{ id: randomUUID(), communityId, itemType: 'entry', itemId, giverId: null },
+    ...{ state: 'asked', uses: [], until: null, reviewBy: today },
+    details: { ...NOTHING_SAID, askedOn: today, level: content.sharingLevel },
+    ...{ recordedBy: person.id, recordedAt: at },
+  });
+  await settleShownUntil(manager, 'entry', itemId);
+}
+
+const NOTHING_SAID: Omit<ConsentDetails, 'askedOn' | 'level'> = {
+  givenAs: 'person',
+  ...{ giverName: '', spokeFor: '', askedWhere: '', language: null, askedHow: [] },
+  ...{ explainedBy: '', explanation: '', proof: null, naming: null, conditions: '', benefits: '' },
+  ...{ afterDeath: null, passTo: '', mayWithdraw: [] },
+};
 
 async function goAlong(
   manager: EntityManager,

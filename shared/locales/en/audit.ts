@@ -76,6 +76,7 @@ export const texts = {
     'calendar-begun': '{{actor}} began the calendar {{subject}}.',
     'calendar-rolled-over': '{{actor}} began the calendar {{subject}} from the year before.',
     'draft-restored': '{{actor}} set the draft of {{subject}} back to what a version says.',
+    'entries-copied-away': '{{actor}} copied entries of {{subject}} to another village: {{number}}.',
     'entries-brought-in': '{{actor}} brought entries into the draft of {{subject}} {{way}}: {{number}}.',
     'entry-added': '{{actor}} added the entry “{{subject}}”.',
     'entry-changed': '{{actor}} changed the entry “{{subject}}”: {{fields}}.',

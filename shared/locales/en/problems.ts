@@ -82,6 +82,8 @@ export const texts = {
     'own-answer-stands': 'This elder has answered for themselves. Only they can change that answer.',
     'elder-has-signed': 'This elder has signed, so the answer stays. Take the submission back to ask again.',
     'no-change-asked': 'Only the elder who asked for a change can let it stand.',
+    'same-village':
+      'Both calendars are of one village. Take the calendar along whole (JSON) and bring that file in.',
     'key-used': 'This was sent for another calendar already. Choose the file again.',
     'other-file-version':
       'This file is of another form than is read here. Export it anew, or bring Dawnpeg up to date.',

@@ -1,10 +1,12 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import {
   importsEndpoints,
   type FileImport,
   type TableImport,
   type TableInput,
+  type VillageCopy,
 } from '#shared/contracts/imports.js';
+import { calendarsEndpoints } from '#shared/contracts/calendars.js';
 import { callApi } from '#src/lib/api-client.js';
 import { uploadToApi } from '#src/lib/api-upload.js';
 import { calendarKeys } from '#src/lib/calendar-queries.js';
@@ -32,6 +34,31 @@ export function useTableImport(calendarId: string) {
     mutationFn: ({ signal, ...body }: TableInput & { signal: AbortSignal }): Promise<TableImport> =>
       callApi(importsEndpoints.table, { params: { calendarId }, body, signal }),
     onSettled: refresh,
+  });
+}
+
+export interface CopySending {
+  toCalendarId: string;
+  key: string;
+  dryRun: boolean;
+  signal: AbortSignal;
+}
+
+export function useCopy(calendarId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: ({ signal, ...body }: CopySending): Promise<VillageCopy> =>
+      callApi(importsEndpoints.copy, { params: { calendarId }, body, signal }),
+    onSettled: (_answer, _problem, { toCalendarId, dryRun }) =>
+      dryRun ? undefined : client.invalidateQueries({ queryKey: calendarKeys.one(toCalendarId) }),
+  });
+}
+
+/** Of all villages of the person. */
+export function everyCalendarQuery() {
+  return queryOptions({
+    queryKey: [...calendarKeys.all, 'of-every-village'],
+    queryFn: async ({ signal }) => (await callApi(calendarsEndpoints.list, { query: {}, signal })).items,
   });
 }
 

@@ -10,6 +10,7 @@ import { useRolesIn } from '#src/lib/roles-in.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { BringInBoard } from './bring-in-board.js';
+import { CopyBoard } from './copy-board.js';
 
 /** What leaves the draft and what comes into it. `takeAlong` belongs to the exports. */
 export function MovesPage({ takeAlong }: { takeAlong: (calendar: Calendar) => ReactNode }) {
@@ -28,6 +29,7 @@ export function MovesPage({ takeAlong }: { takeAlong: (calendar: Calendar) => Re
       />
       <div className="grid grid-cols-1 gap-4">
         {isOfficer && <BringInBoard calendar={calendar} />}
+        {isOfficer && <CopyBoard calendar={calendar} />}
         {seesDrafts ? takeAlong(calendar) : <Board>{t('page.closed')}</Board>}
       </div>
     </Page>

@@ -1,0 +1,33 @@
+import type { EntryInput } from '#shared/contracts/calendars.js';
+import { In, type EntityManager } from 'typeorm';
+import { SignEntity } from '../../db/entities/sign.entity.js';
+import { isForVillage } from '../../policy/policy.js';
+import { sharedById } from '../../policy/sharing.repository.js';
+import { keepingShared, sharedSignIds } from '../../policy/sign-sight.js';
+import type { Viewer } from '../../policy/viewer.js';
+import { withListedSigns } from '../signs/entry-signs.service.js';
+
+/** Contents with those signs of the village's list alone that stand there today for everybody, in the list's words. */
+export async function withSignsOfToday<E extends { content: EntryInput }>(
+  manager: EntityManager,
+  viewer: Viewer,
+  entries: readonly E[],
+): Promise<E[]> {
+  const ids = sharedSignIds(entries.map(({ content }) => content));
+  if (ids.length === 0) return [...entries];
+  const { communityId } = viewer;
+  const rows = await manager.findBy(SignEntity, { id: In(ids), communityId });
+  const shared = await sharedById(manager, 'sign', ids);
+  const listed = new Set(
+    rows
+      .filter(({ id, takenOutAt }) => takenOutAt === null && isForVillage(shared.get(id), viewer.today))
+      .map(({ id }) => id),
+  );
+  return Promise.all(
+    entries.map(async (entry) => {
+      const written = keepingShared(entry.content, (id) => listed.has(id));
+      const writing = { entryId: null, stored: null, written, prefix: '' };
+      return { ...entry, content: await withListedSigns(manager, viewer, writing) };
+    }),
+  );
+}
