@@ -1,5 +1,6 @@
 import { screen, waitFor } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
+import type { Note } from '#shared/contracts/notes.js';
 import type { ItemState } from '#shared/contracts/withdrawals.js';
 import { TakeBackPage } from '#src/features/withdrawals/components/take-back-page.js';
 import { keep, readKept } from '#src/lib/device-storage.js';
@@ -121,5 +122,51 @@ describe('something hidden', () => {
     });
     await user.click(await screen.findByRole('button', { name: 'Bring it back' }));
     await waitFor(() => expect(writes()).toMatchObject([{ method: 'DELETE', path: `${item}/pause` }]));
+  });
+});
+
+describe('what stays, but otherwise', () => {
+  it('is asked to be corrected by a note that survives a reload until it is pinned', async () => {
+    const notes = `/api/communities/${VILLAGE}/notes`;
+    const pinned: Note = {
+      ...{ subjectType: 'entry', subjectId: ENTRY, id: ELDER, pin: { at: 'whole' }, wordsStand: true },
+      ...{ text: 'On the third evening', voices: 0, level: 'village', authorName: 'Beyno', mine: true },
+      ...{ writtenAt: '2026-12-01T06:00:00.000Z', closedAt: null, answers: [] },
+    };
+    const { user, writes, unmount } = await open({ [`GET ${item}/state`]: stateOf() });
+    await user.click(await screen.findByRole('button', { name: 'Ask for the correction' }));
+    expect(writes()).toEqual([]);
+    await user.type(screen.getByLabelText('What it should say'), 'On the third evening');
+    unmount();
+
+    const again = await open({
+      [`GET ${item}/state`]: stateOf(),
+      [`POST ${notes}`]: () => Response.json(pinned, { status: 201 }),
+    });
+    const field = await screen.findByLabelText<HTMLTextAreaElement>('What it should say');
+    expect(field.value).toBe('On the third evening');
+    await again.user.click(screen.getByRole('button', { name: 'Ask for the correction' }));
+    await screen.findByText(/Your note is pinned/u);
+    expect(again.writes()[0]?.body).toMatchObject({
+      subjectType: 'entry',
+      subjectId: ENTRY,
+      text: 'On the third evening',
+    });
+    expect(field.value).toBe('');
+  });
+
+  it('loses its recording only after a second yes, and says that the words stay', async () => {
+    const may = { withdraw: true, pause: true, resume: false, takeNameOff: true, removeSound: true };
+    const { user, writes } = await open({
+      [`GET ${item}/state`]: stateOf({ may }),
+      [`POST /api/communities/${VILLAGE}/items/attachment/${ENTRY}/sound-removal`]: () =>
+        new Response(null, { status: 204 }),
+    });
+    await user.click(await screen.findByRole('button', { name: 'Remove the recording' }));
+    expect(writes()).toEqual([]);
+    await screen.findByText('Remove the recording and keep the words?');
+    await user.click(screen.getByRole('button', { name: 'Yes, remove the recording' }));
+    await screen.findByText('The recording is gone. Its words stay.');
+    expect(writes().map(({ body }) => body)).toEqual([{ askedById: null }]);
   });
 });
