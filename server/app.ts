@@ -113,6 +113,7 @@ import { CardsService } from './features/cards/cards.service.js';
 import { ComparisonService } from './features/versions/comparison.service.js';
 import { decadesRoutes } from './features/decades/decades.routes.js';
 import { DecadesService } from './features/decades/decades.service.js';
+import { TodaysEngineService } from './features/versions/todays-engine.service.js';
 import { RestoringService } from './features/versions/restoring.service.js';
 import { WhyMovedService } from './features/versions/why-moved.service.js';
 import { FrozenContentService } from './features/versions/frozen-content.service.js';
@@ -267,6 +268,7 @@ export function createApp(options: AppOptions): App {
     publishing,
     new ComparisonService(contents, whyMoved),
     new RestoringService(dataSource, clock),
+    new TodaysEngineService(dataSource, contents, sky),
   );
   const attachmentFiles = new AttachmentFilesService(options.storage, options.scan ?? null);
   const proofs = new ProofsService(attachmentFiles, clock);

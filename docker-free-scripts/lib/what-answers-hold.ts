@@ -175,6 +175,8 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
 
 /** Why an endpoint holds nothing of what is planted. Every other one has its line above, or a test says so. */
 export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
+  readTodaysEngine:
+    'names entries only where another engine reckoned them; what it reads is cut like a version',
   readHealth: 'tells of the machine alone',
   readOpenApi: 'is the contracts',
   readSession: 'names the person and their villages',

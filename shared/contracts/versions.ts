@@ -6,6 +6,7 @@ import { defineEndpoint, member } from './endpoint.js';
 import { whyMoved } from './moves.js';
 import { language, ROLES, signOffRule } from './people.js';
 import { restoredDraft } from './restored-draft.js';
+import { todaysEngine } from './todays-engine.js';
 import { markerNames, nightSegment, placeSnapshot } from './stars.js';
 
 export const VERSION_STATES = [
@@ -130,6 +131,8 @@ export const version = versionSummary.extend({
   /** False where markers or figures are left out that only kept entries go by; its hash cannot be made again then. */
   headerComplete: z.boolean(),
   scheme: z.union([z.literal(1), z.literal(2)]),
+  /** Today's engine, where an older one reckoned the version; left out where it is the same. */
+  todaysEngine: z.string().optional(),
   /** What the version's hash goes over: of entries seen, kept and withdrawn, and of nothing at all, told apart by nobody. */
   leaves: z.array(z.string()),
   /** Entries that their people keep, where the giver chose an empty slot; and those that were withdrawn with a trace. */
@@ -232,6 +235,16 @@ export const versionsEndpoints = {
     params: calendarParams,
     query: z.strictObject({ from: versionNumber, to: versionNumber }),
     response: comparison,
+  }),
+  readTodaysEngine: defineEndpoint({
+    id: 'readTodaysEngine',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/todays-engine',
+    summary:
+      'What today’s engine would say of a version that an older one reckoned; the version stays as it is',
+    access: member('calendar', ...ROLES),
+    params: numberParams,
+    response: todaysEngine,
   }),
   restore: defineEndpoint({
     id: 'restoreVersion',

@@ -4,6 +4,7 @@ import { wholeList } from '../../http/reply.js';
 import type { ComparisonService } from './comparison.service.js';
 import type { PublishingService } from './publishing.service.js';
 import type { RestoringService } from './restoring.service.js';
+import type { TodaysEngineService } from './todays-engine.service.js';
 import type { VersionsService } from './versions.service.js';
 
 export function versionsRoutes(
@@ -12,6 +13,7 @@ export function versionsRoutes(
   publishing: PublishingService,
   comparison: ComparisonService,
   restoring: RestoringService,
+  todaysEngine: TodaysEngineService,
 ): void {
   mount.forMember(versionsEndpoints.list, async ({ params }, actor) =>
     wholeList(await versions.list(actor, params.calendarId)),
@@ -24,6 +26,9 @@ export function versionsRoutes(
   );
   mount.forMember(versionsEndpoints.compare, ({ params, query }, actor) =>
     comparison.compare(actor, params.calendarId, query.from, query.to),
+  );
+  mount.forMember(versionsEndpoints.readTodaysEngine, ({ params }, actor) =>
+    todaysEngine.read(actor, params.calendarId, Number(params.number)),
   );
   mount.forMember(versionsEndpoints.restore, ({ params }, actor) =>
     restoring.restore(actor, params.calendarId, Number(params.number)),

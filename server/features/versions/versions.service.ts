@@ -1,6 +1,7 @@
 import { signingObstacle, signOffGaps, type ReviewState } from '#shared/calendar/sign-off.js';
 import { isOut } from '#shared/calendar/version-state.js';
 import type { SignOffGap, Version, VersionEntry, VersionSummary } from '#shared/contracts/versions.js';
+import { ENGINE_VERSION } from '#shared/sky/index.js';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { hasRole, type Actor } from '../../http/actor.js';
@@ -83,6 +84,7 @@ export class VersionsService {
       headerHash: row.headerHash,
       headerComplete: headerComplete && !row.headerRedacted,
       scheme: row.scheme === 1 ? 1 : 2,
+      ...(header.engineVersion !== ENGINE_VERSION && { todaysEngine: ENGINE_VERSION }),
       leaves: frozen.leaves,
       keptCount,
       withdrawnCount: row.withdrawnTraces,

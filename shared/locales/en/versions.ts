@@ -163,6 +163,21 @@ export const texts = {
     done: '{{label}} is recalled.',
   },
 
+  engine: {
+    title: 'Reckoned by an older version',
+    stays:
+      'Version {{frozenBy}} of the reckoning gave these days; today it is {{today}}. The days stay as they were agreed.',
+    same: 'Today’s reckoning says the same of every entry that you see.',
+    differ_one: 'Of {{all}} entries today’s reckoning would date {{count}} otherwise.',
+    differ_other: 'Of {{all}} entries today’s reckoning would date {{count}} otherwise.',
+    most_one: 'The biggest difference is {{count}} day.',
+    most_other: 'The biggest difference is {{count}} days.',
+    list: 'Which ones',
+    caption: 'Entries that today’s reckoning would date otherwise',
+    frozen: 'As agreed',
+    today: 'Today’s reckoning',
+  },
+
   changes: {
     title: 'Changed since {{label}}',
     none: 'No entry says anything else.',

@@ -23,6 +23,7 @@ import { StateChip } from '#src/ui/state-chip.js';
 import { Board } from '#src/ui/surfaces.js';
 import { BasisBoard } from './basis-board.js';
 import { ChangesBoard } from './changes-board.js';
+import { EngineNotice } from './engine-notice.js';
 import { FrozenEntries } from './frozen-entries.js';
 import { FrozenStrip } from './frozen-strip.js';
 import { MissingBoard } from './missing-board.js';
@@ -86,6 +87,7 @@ function FrozenVersion({ calendarId, number, review, about, takeAlong }: FrozenV
         {isOpen ? <MissingBoard version={version} /> : <SignaturesBoard version={version} />}
       </Columns>
       {review !== undefined && <div className="mb-4">{review(version)}</div>}
+      <EngineNotice version={version} />
       <FrozenStrip version={version} />
       <Columns wider="first">
         <EntryTitles titles={titlesOf(version.entries)}>
