@@ -41,6 +41,6 @@ export function overlappingEntryIds(entries: readonly OverlapCandidate[]): Set<s
 }
 
 /** ISO dates of four-digit years sort as text. */
-function bestDaysWithin(inner: EntryWindow, outer: EntryWindow): boolean {
+export function bestDaysWithin(inner: EntryWindow, outer: EntryWindow): boolean {
   return inner.bestFrom >= outer.bestFrom && inner.bestTo <= outer.bestTo;
 }

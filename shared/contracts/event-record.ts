@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { FIRST_YEAR, LAST_YEAR } from '../sky/vocabulary.js';
 import { id, isoDate, line, monthDay, text } from './common.js';
 
 export const RECORD_SIGNS_MAX = 12;
@@ -139,6 +140,13 @@ const recordFields = z.strictObject({
     confidence: z.enum(CONFIDENCES).nullable(),
     by: line(120),
     basis: z.enum(BASES).nullable(),
+    /** Since about which year people go by it; left out where nobody says. */
+    sinceYear: z
+      .number('not-a-number')
+      .int()
+      .min(FIRST_YEAR, 'year-range')
+      .max(LAST_YEAR, 'year-range')
+      .optional(),
   }),
   heard: z.strictObject({ where: line(120), day: isoDate.nullable(), language: line(80) }),
   checked: z.strictObject({

@@ -87,7 +87,7 @@ export function useRecordFacts(): (record: EventRecord | undefined) => Record<Re
       of === null || of.day === '' || of.name === ''
         ? ''
         : t('check.said', { ...of, day: dates.day(of.day) });
-    const trust = ({ trust: { confidence, by, basis }, checked }: EventRecord) => [
+    const trust = ({ trust: { confidence, by, basis, sinceYear }, checked }: EventRecord) => [
       {
         key: 'confidence',
         label: t('confidence.label'),
@@ -95,6 +95,11 @@ export function useRecordFacts(): (record: EventRecord | undefined) => Record<Re
       },
       { key: 'by', label: t('confidenceBy'), value: by },
       { key: 'basis', label: t('basis.label'), value: basis === null ? '' : t(`basis.${basis}`) },
+      {
+        key: 'sinceYear',
+        label: t('sinceYear'),
+        value: sinceYear === undefined ? '' : t('sinceYearSaid', { year: String(sinceYear) }),
+      },
       { key: 'checkedWork', label: t('check.work'), value: check(checked.work) },
       { key: 'checkedSafety', label: t('check.safety'), value: check(checked.safety) },
       { key: 'checkedLate', label: t('check.late'), value: check(checked.late) },

@@ -16,6 +16,7 @@ import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
 import { liveEntries, writeOrder } from '../calendars/calendars.repository.js';
+import { withSignsOfThisVillage } from '../signs/entry-signs.service.js';
 import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
 import { sharingOf } from '../calendars/entry-sharing.service.js';
 
@@ -85,7 +86,9 @@ async function land(
   if (before.length + entries.length > ENTRIES_MAX) throw conflict('too-many-entries');
   const { communityId, person } = actor;
   const touched = { updatedBy: person.id, updatedAt: at };
-  for (const [index, { id, content, sameAs, variants, isToBeAsked }] of entries.entries()) {
+  const viewer = await viewerOf(manager, actor, at);
+  for (const [index, { id, content: said, sameAs, variants, isToBeAsked }] of entries.entries()) {
+    const content = await withSignsOfThisVillage(manager, viewer, said);
     const position = before.length + index;
     await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
     if (sameAs === null) {

@@ -51,6 +51,29 @@ export async function withListedSigns(
   return { ...written, record: { ...record, signs: { ...record.signs, list: whole } } };
 }
 
+/**
+ * A content from elsewhere: it refers to signs of this village's list that the person sees; all other signs are its own
+ * words from then on.
+ */
+export async function withSignsOfThisVillage(
+  manager: EntityManager,
+  viewer: Viewer,
+  content: EntryInput,
+): Promise<EntryInput> {
+  const { record } = content;
+  const ids = sharedSignIds([content]);
+  if (record === undefined || ids.length === 0) return content;
+  const rows = await manager.findBy(SignEntity, { id: In(ids), communityId: viewer.communityId });
+  const shared = await sharedById(manager, 'sign', ids);
+  const offered = new Set(
+    rows.filter((row) => row.takenOutAt === null && maySee(viewer, shared.get(row.id))).map(({ id }) => id),
+  );
+  const list = record.signs.list.map(({ sharedId, ...words }): RecordSign => {
+    return sharedId !== undefined && offered.has(sharedId) ? { ...words, sharedId } : words;
+  });
+  return { ...content, record: { ...record, signs: { ...record.signs, list } } };
+}
+
 /** After the entry and its level are written: it refers to nothing that fewer people see. A refusal takes both back. */
 export async function expectTellableSigns(
   manager: EntityManager,

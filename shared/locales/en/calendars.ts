@@ -429,7 +429,36 @@ export const texts = {
       writeSigns: 'Write other signs',
       fixedDate: 'Go by a fixed date',
       byPlanned: 'Go by its planned day',
+      otherPeople: 'Say who else does it',
+      writeCaution: 'Write the caution',
+      seeDrift: 'See how it moved',
     },
+  },
+
+  /** What to look at besides the days themselves. */
+  advice: {
+    'same-people':
+      'Its best days and those of {{others}} lie within each other, and the same people do both: {{people}}.',
+    'crop-not-ripe_one':
+      'It begins {{count}} day after the first best day of {{sown}}, and the crop takes at least {{from}}.',
+    'crop-not-ripe_other':
+      'It begins {{count}} days after the first best day of {{sown}}, and the crop takes at least {{from}}.',
+    'crop-long-ripe_one':
+      'It begins more than {{to}} days after the last best day of {{sown}}: what was sown last has long been ripe.',
+    'crop-long-ripe_other':
+      'It begins more than {{to}} days after the last best day of {{sown}}: what was sown last has long been ripe.',
+    'cloudy-season':
+      '{{marker}} is expected in months in which cloud usually hides the sky here. It may be seen late or not at all.',
+    moonlit: 'On {{day}} a bright Moon stands near {{marker}}. It may be seen some days later than computed.',
+    driftedLater_one:
+      '{{marker}} comes {{count}} day later in the year than about {{year}}, when people began to go by it.',
+    driftedLater_other:
+      '{{marker}} comes {{count}} days later in the year than about {{year}}, when people began to go by it.',
+    driftedEarlier_one:
+      '{{marker}} comes {{count}} day earlier in the year than about {{year}}, when people began to go by it.',
+    driftedEarlier_other:
+      '{{marker}} comes {{count}} days earlier in the year than about {{year}}, when people began to go by it.',
+    'no-safety-line': 'Somebody can be hurt here, and no line of caution is written.',
   },
 
   request: {

@@ -130,6 +130,10 @@ export const texts = {
     recorded: 'written records',
     trial: 'a trial',
   },
+  sinceYear: 'Since about which year people go by it',
+  sinceYearHint:
+    'Where it is handed down from long ago. A star moves over the centuries, and you are told by how much.',
+  sinceYearSaid: 'about {{year}}',
   check: {
     title: 'Read by the responsible office',
     work: 'The work and its days were checked',

@@ -9,6 +9,7 @@ import { Care } from '#src/ui/surfaces.js';
 import type { FieldGroup } from '../model/field-problems.js';
 import type { FormState } from '../model/form-state.js';
 import type { ShownEntry } from '../model/preview-dates.js';
+import { useAdvice } from '../model/use-advice.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
@@ -50,6 +51,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
   const groups = useGroups(board, firstGroups(form, saved !== null), saving);
   const { isWide } = editor.selection;
   useFocusOnNew(groups, saved === null && isWide);
+  const advice = useAdvice(editor, entry);
   const answers = editor.answers.get(entry.id);
   const edit = editor.edits.all.get(entry.id);
   const search = () => {
@@ -108,6 +110,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             form={form}
             entry={entry}
             all={editor.shown}
+            advice={advice}
             onWay={(way) => goWay(way, form, groups, search)}
           />
           <SignsInLine
@@ -226,6 +229,12 @@ function goWay(way: Way, form: FormState, groups: Groups, search: () => void): v
       return;
     case 'writeSigns':
       groups.goTo('signs');
+      return;
+    case 'otherPeople':
+      groups.goTo('work');
+      return;
+    case 'writeCaution':
+      groups.goTo('what');
       return;
     case 'changeDays':
     case 'changeLastDate':

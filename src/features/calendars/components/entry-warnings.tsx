@@ -8,21 +8,24 @@ import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { leadingRow, type FormState } from '../model/form-state.js';
 import type { ShownEntry } from '../model/preview-dates.js';
+import type { Advised } from '../model/use-advice.js';
 import { collidingWith, waysOut, type Way } from '../model/warning-ways.js';
+import { AdviceLine } from './advice-line.js';
 
 interface EntryWarningsProps {
   form: FormState;
   entry: ShownEntry;
   all: readonly ShownEntry[];
+  advice: readonly Advised[];
   onWay: (way: Way) => void;
 }
 
 /** What to look at before elders are asked: why, and ways out. None of it keeps the draft from being saved. */
-export function EntryWarnings({ form, entry, all, onWay }: EntryWarningsProps) {
+export function EntryWarnings({ form, entry, all, advice, onWay }: EntryWarningsProps) {
   const { t } = useTranslation(['calendars', 'sky']);
   const say = useWarningWords(form, entry, all);
   const warnings = entry.dates?.warnings ?? [];
-  if (warnings.length === 0) return null;
+  if (warnings.length + advice.length === 0) return null;
   const row = leadingRow(form);
   return (
     <Care className="mt-3">
@@ -46,6 +49,15 @@ export function EntryWarnings({ form, entry, all, onWay }: EntryWarningsProps) {
                 </Button>
               ))}
             </div>
+          </li>
+        ))}
+        {advice.map((advised) => (
+          <li key={advised.advice}>
+            <AdviceLine
+              advised={advised}
+              marker={row ? markerName(row) : form.draft.marker.markerKey}
+              onWay={onWay}
+            />
           </li>
         ))}
       </ul>

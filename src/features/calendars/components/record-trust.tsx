@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { BASES, CONFIDENCES, type EventRecord } from '#shared/contracts/event-record.js';
 import { TextField, TickField } from '#src/ui/field.js';
-import { ChoiceField, LineField } from '#src/ui/said-fields.js';
+import { ChoiceField, CountField, LineField } from '#src/ui/said-fields.js';
 import { setRecord, type RecordProps } from './record-parts.js';
 
 const CHECKS = ['work', 'safety', 'late'] as const satisfies (keyof EventRecord['checked'])[];
@@ -39,6 +39,18 @@ export function RecordTrust({ form }: RecordProps) {
         value={trust.by}
         problem={at('by')}
         onChange={(by) => setRecord(form, 'trust', { by })}
+      />
+      <CountField
+        label={t('sinceYear')}
+        hint={t('sinceYearHint')}
+        value={trust.sinceYear ?? null}
+        problem={at('sinceYear')}
+        onChange={(year) => {
+          form.change(({ record }) => {
+            const { sinceYear: _before, ...rest } = record.trust;
+            return { record: { ...record, trust: year === null ? rest : { ...rest, sinceYear: year } } };
+          });
+        }}
       />
       <fieldset className="grid gap-3">
         <legend className="field-label">{t('check.title')}</legend>

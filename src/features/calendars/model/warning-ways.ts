@@ -16,7 +16,9 @@ export type Way =
         | 'changeDays'
         | 'changeLastDate'
         | 'writeSigns'
-        | 'fixedDate';
+        | 'fixedDate'
+        | 'otherPeople'
+        | 'writeCaution';
     }
   | { kind: 'otherDay'; phenomenon: Phenomenon };
 

@@ -125,6 +125,18 @@ describe('the editor', () => {
     expect(screen.getAllByText('not saved yet').length).toBeGreaterThan(0);
   });
 
+  it('says what else to look at, and each way out opens the place where it is mended', async () => {
+    const fixed = { type: 'fixed-date', date: { month: 6, day: 10 }, source: 'the village' } as const;
+    answerWith(server(draft({ kind: 'safety', caution: '', lead: fixed })));
+    const { user } = await open();
+    await screen.findByText('Somebody can be hurt here, and no line of caution is written.');
+    await user.click(screen.getByRole('button', { name: 'Write the caution' }));
+    await user.type(await screen.findByLabelText('Caution'), 'Go in pairs.');
+    await waitFor(() => {
+      expect(screen.queryByText(/no line of caution is written/u)).toBeNull();
+    });
+  });
+
   it('keeps what is written over a reload, says so, and saves it over the state it was written over', async () => {
     const log = answerWith(server(draft({})));
     const first = await open();
