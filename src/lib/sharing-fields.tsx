@@ -11,7 +11,7 @@ import { SelectField, TickField } from '#src/ui/field.js';
 import { MonthDaySelect } from '#src/ui/month-day-select.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Well } from '#src/ui/surfaces.js';
-import { useCurrentCommunity } from './community.js';
+import { useCurrentCommunity, useRoles } from './community.js';
 import { useDateWords } from './date-words.js';
 import { groupsQuery, villagePeopleQuery } from './sharing-queries.js';
 
@@ -165,10 +165,12 @@ export interface PersonSelectProps {
   onChange: (personId: string | null) => void;
 }
 
-/** One of the village's people. */
+/** One of the village's people; nothing for those who may not read who belongs to it. */
 export function PersonSelect({ label, hint, nobody, value, problem, onChange }: PersonSelectProps) {
   const { communityId } = useCurrentCommunity();
-  const people = useQuery(villagePeopleQuery(communityId));
+  const readsPeople = useRoles().is('steward', 'officer', 'elder');
+  const people = useQuery({ ...villagePeopleQuery(communityId), enabled: readsPeople });
+  if (!readsPeople) return null;
   return (
     <SelectField
       label={label}
