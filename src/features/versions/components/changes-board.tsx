@@ -19,7 +19,7 @@ export function ChangesBoard({ version, before }: { version: Version; before: Ve
   const { data } = useQuery(comparisonQuery(calendarId, String(before.number), String(number)));
   if (data === undefined) return null;
   return (
-    <Board title={t('changes.title', { label: before.label })}>
+    <Board title={t('changes.title', { label: before.label ?? '' })}>
       <ChangeList calendarId={calendarId} comparison={data} />
       <p className="mt-2">
         <Link className="link-line" to={paths.compare(calendarId, { from: before.number, to: number })}>
