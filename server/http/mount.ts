@@ -3,6 +3,7 @@ import type { Request, Response, Router } from 'express';
 import type { DataSource } from 'typeorm';
 import type { z } from 'zod';
 import { withHandOf, withWriteKey, type Actor, type Person } from './actor.js';
+import { looksOnly } from '../policy/viewer.js';
 import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
 import { actorFor, type HelpingRules } from './on-behalf.js';
@@ -75,6 +76,7 @@ export class Mount {
     if (endpoint.access.kind !== 'member') throw new TypeError(`${endpoint.id} is not for members`);
     this.add(endpoint, async (request, call) => {
       const actor = await this.actor(endpoint, request);
+      if (endpoint.method === 'GET') looksOnly(actor);
       const key = writeKeyOf(endpoint, request, actor);
       return withHandOf(actor, () => withWriteKey(key, () => handler(call(), actor)));
     });

@@ -6,8 +6,15 @@ import type { Clock } from './context.js';
 
 type Done = (error?: unknown) => void;
 
+/** A session that goes on is written down again once in so long, not with every call. */
+const TOUCH_EVERY_MS = 60_000;
+const REMEMBERED_MAX = 10_000;
+
 /** Sessions in MariaDB. Rows know their person, so that all of a person's sessions can be ended at once. */
 export class SessionStore extends Store {
+  /** Until when sessions hold, as this process last wrote it. */
+  private readonly written = new Map<string, number>();
+
   constructor(
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
@@ -40,13 +47,21 @@ export class SessionStore extends Store {
   }
 
   override destroy(sid: string, done: Done = ignore): void {
+    this.written.delete(sessionHash(sid));
     settle(this.rows.delete({ sidHash: sessionHash(sid) }), done);
   }
 
   /** Only a row that is still there: a request on its way must not bring an ended session back. */
   override touch(sid: string, session: SessionData, done: Done = ignore): void {
     const expiresAt = new Date(this.clock.now().getTime() + (session.cookie.originalMaxAge ?? 0));
-    const touched = this.rows.update({ sidHash: sessionHash(sid) }, { expiresAt });
+    const sidHash = sessionHash(sid);
+    if (Math.abs(expiresAt.getTime() - (this.written.get(sidHash) ?? 0)) < TOUCH_EVERY_MS) {
+      done();
+      return;
+    }
+    if (this.written.size >= REMEMBERED_MAX) this.written.clear();
+    this.written.set(sidHash, expiresAt.getTime());
+    const touched = this.rows.update({ sidHash }, { expiresAt });
     // The answer is ready by now; a touch that fails only ends the session sooner.
     settle(
       touched.catch(() => undefined),

@@ -26,7 +26,22 @@ export interface Member {
 const JD_UNIX_EPOCH = 2440587.5;
 const MS_PER_DAY = 86_400_000;
 
-export async function viewerOf(manager: EntityManager, member: Member, now: Date): Promise<Viewer> {
+/** Who looks in calls that change nothing, made out once. */
+const looking = new WeakMap<Member, Promise<Viewer> | null>();
+
+/** From here to the end of this call nothing changes: whoever looks stays who they are. */
+export function looksOnly(member: Member): void {
+  looking.set(member, null);
+}
+
+export function viewerOf(manager: EntityManager, member: Member, now: Date): Promise<Viewer> {
+  const known = looking.get(member);
+  const viewer = known ?? makeOut(manager, member, now);
+  if (known === null) looking.set(member, viewer);
+  return viewer;
+}
+
+async function makeOut(manager: EntityManager, member: Member, now: Date): Promise<Viewer> {
   const { communityId } = member;
   const { personId, roles } = member.helper?.eyes ?? { personId: member.person.id, roles: member.roles };
   const groups = await manager.findBy(GroupMemberEntity, { personId, group: { communityId } });
