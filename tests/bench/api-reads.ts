@@ -1,14 +1,6 @@
 import autocannon from 'autocannon';
-import { mkdtempSync, rmSync } from 'node:fs';
-import os from 'node:os';
-import path from 'node:path';
-import { ensureBuilt } from '../../docker-free-scripts/lib/build.mjs';
-import { freePort } from '../../docker-free-scripts/lib/ports.mjs';
-import { startBuiltServer } from '../../docker-free-scripts/lib/product-server.mjs';
-import { randomText } from '../../docker-free-scripts/lib/secrets.mjs';
-import { startThrowAway } from '../../docker-free-scripts/lib/throw-away.mjs';
 import { openClient, signInAs, type Client } from '#tests/support/api.js';
-import { JOURNEY_NOW } from '#tests/support/journey-clock.js';
+import { onBuiltProduct } from './built-product.js';
 
 /** The demo villages' everyday reads at this rate, and for the same time nothing but the question whether it is well. */
 const RATE_PER_SECOND = 100;
@@ -22,33 +14,16 @@ export interface ApiReads {
 
 /** Measures the built product on a throw-away database. */
 export async function measureApiReads(): Promise<ApiReads> {
-  await ensureBuilt();
-  const database = await startThrowAway({ durability: 'kept' });
-  const dataDir = mkdtempSync(path.join(os.tmpdir(), `dawnpeg-test-${process.pid}-files-`));
-  try {
-    const server = await startBuiltServer({
-      ...process.env,
-      ...{ NODE_ENV: 'development', HOST: '127.0.0.1', PORT: String(await freePort()), PUBLIC_URL: '' },
-      ...{ DB_HOST: '127.0.0.1', DB_PORT: String(database.port), DB_NAME: database.name },
-      ...{ DB_USER: database.user, DB_PASSWORD: database.password, DATA_DIR: dataDir },
-      ...{ SESSION_SECRET: randomText(), DEMO: '1', FIXED_NOW: JOURNEY_NOW, LOG_LEVEL: 'error' },
-    });
-    try {
-      const officer = await openClient(server.address);
-      await signInAs(officer, 'officer');
-      const paths = await everydayReads(officer);
-      // Everybody has been here before: what is computed once a year is computed.
-      for (const each of paths) await expectWell(officer, each);
-      const health = await p95Of(server.address, ['/api/health'], officer.cookie);
-      const reads = await p95Of(server.address, paths, officer.cookie);
-      return { apiReadP95Ms: reads, healthP95Ms: health };
-    } finally {
-      await server.stop();
-    }
-  } finally {
-    await database.remove();
-    rmSync(dataDir, { recursive: true, force: true });
-  }
+  return onBuiltProduct(async (address) => {
+    const officer = await openClient(address);
+    await signInAs(officer, 'officer');
+    const paths = await everydayReads(officer);
+    // Everybody has been here before: what is computed once a year is computed.
+    for (const each of paths) await expectWell(officer, each);
+    const health = await p95Of(address, ['/api/health'], officer.cookie);
+    const reads = await p95Of(address, paths, officer.cookie);
+    return { apiReadP95Ms: reads, healthP95Ms: health };
+  });
 }
 
 /** What the screens of a day ask for: Today, the stars, the draft, its versions, the review, the village. */
