@@ -1,6 +1,6 @@
 import { z } from 'zod';
-import { id, instant, line, listOf } from './common.js';
-import { entryDates, entryInput } from './calendars.js';
+import { id, instant, isoDate, line, listOf } from './common.js';
+import { entryDates, entryInput, entryWindow } from './calendars.js';
 import { frozenVariant } from './variants.js';
 import { defineEndpoint, member } from './endpoint.js';
 import { whyMoved } from './moves.js';
@@ -125,6 +125,17 @@ export const versionSummary = z.strictObject({
 });
 export type VersionSummary = z.infer<typeof versionSummary>;
 
+/** Days that were typed after the version was frozen, of work from which one of its entries is counted. */
+export const doneSince = z.strictObject({
+  entryId: id,
+  anchorId: id,
+  from: isoDate,
+  to: isoDate.nullable(),
+  /** The entry's own days, counted from there. */
+  window: entryWindow.nullable(),
+});
+export type DoneSince = z.infer<typeof doneSince>;
+
 export const version = versionSummary.extend({
   header: versionHeader,
   headerHash: z.string(),
@@ -139,6 +150,8 @@ export const version = versionSummary.extend({
   keptCount: z.number().int(),
   withdrawnCount: z.number().int(),
   entries: z.array(versionEntry),
+  /** Beside the frozen text, which stays; left out where there is nothing of the kind. */
+  doneSince: z.array(doneSince).optional(),
   /** What the officer wrote when changes were asked or the version was recalled; empty otherwise. */
   stateNote: z.string(),
   signatures: z.array(signature),

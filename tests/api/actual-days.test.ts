@@ -10,6 +10,7 @@ import {
   entryInput,
   openVillage,
   publishDraft,
+  readVersion,
   reasonOf,
   submit,
   type Village,
@@ -50,6 +51,26 @@ async function titled(client: Client, title: string): Promise<Entry> {
 }
 
 describe('the day on which work was done', () => {
+  it('stands beside a version that was frozen before, whose own text still waits', async () => {
+    const { officer, elder } = village;
+    const sowing = await addEntry(officer, calendar.id, SOWING);
+    const weed = await addEntry(officer, calendar.id, weeding(sowing.id));
+    const published = await publishDraft(village, calendar.id);
+    expect(published).not.toHaveProperty('doneSince');
+    await elder.put(actualPath(sowing), DONE).expect(200);
+    const read = await readVersion(await api.signIn('staff'), published);
+    expect(read.doneSince).toMatchObject([
+      {
+        entryId: weed.id,
+        anchorId: sowing.id,
+        from: '2027-06-28',
+        to: null,
+        window: { bestFrom: '2027-07-12' },
+      },
+    ]);
+    expect(read.entries.map(({ dates }) => dates)).toEqual(published.entries.map(({ dates }) => dates));
+  });
+
   it('gives days to what hangs on it, and takes them again', async () => {
     const { officer, elder } = village;
     const sowing = await addEntry(officer, calendar.id, SOWING);

@@ -1,3 +1,4 @@
+import { anchorOf } from '#shared/calendar/anchors.js';
 import { lateSaid, signsSaid } from '#shared/calendar/said-words.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import { isStarLead } from '#shared/calendar/entry-model.js';
@@ -24,6 +25,7 @@ export function toSheetEntries(
   year: number,
   texts: EntryTexts,
 ): SheetEntry[] {
+  const titles = new Map(bodies.map(({ entryId, content }) => [entryId, content.titleOfficer]));
   return bodies
     .filter(({ content }) => needsALine(content))
     .flatMap((body) => linesOf(body, texts.files))
@@ -47,7 +49,7 @@ export function toSheetEntries(
       caution: content.caution,
       stop: stopOf(content, year),
       checked: checksOf(content),
-      whyNoDate: dates.window ? null : reason({ content, dates }, year, texts),
+      whyNoDate: dates.window ? null : reason({ content, dates }, year, texts, titles),
     }));
 }
 
@@ -134,12 +136,22 @@ function checksOf({ record }: EntryInput): SheetCheck[] {
   return [...found.values()];
 }
 
-function reason({ content, dates }: Body, year: number, texts: EntryTexts): string | null {
+function reason(
+  { content, dates }: Body,
+  year: number,
+  texts: EntryTexts,
+  titles: ReadonlyMap<string, string>,
+): string | null {
   const { files, words } = texts;
   const { lastDate } = content;
   if (lastDate !== null && dates.warnings.includes('window-closed-by-last-date')) {
     const date = words.day(dateIn(year, lastDate.date));
     return files('sheet.noDate.closed', { date, source: lastDate.source });
+  }
+  // Named only where it is on the board itself.
+  const title = titles.get(anchorOf(content.lead) ?? '');
+  if (title !== undefined && dates.warnings.includes('waits-for-actual-day')) {
+    return files('sheet.noDate.countedFrom', { title });
   }
   return whyNoDate(dates, year, texts);
 }

@@ -11,6 +11,7 @@ import { viewerOf } from '../../policy/viewer.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { frozenContent, isVisible, visibleVersion } from './frozen-content.service.js';
+import { doneSince } from './done-since.service.js';
 import { readReviewState } from './review-state.service.js';
 import { seenOfVersion } from './seen-content.service.js';
 import { toSignature, toSummary } from './versions.mapper.js';
@@ -69,6 +70,7 @@ export class VersionsService {
       frozen.header,
       frozen.entries,
     );
+    const done = await doneSince(manager, header.year, entries);
     const signatures = await signaturesOf(manager, row.id);
     const review = await readReviewState(manager, row);
     const names = await personNames(manager, [
@@ -89,6 +91,7 @@ export class VersionsService {
       keptCount,
       withdrawnCount: row.withdrawnTraces,
       entries,
+      ...(done.length > 0 && { doneSince: done }),
       signatures: signatures.map((signature) => toSignature(signature, names)),
       signOffRule: row.signOffRule,
       gaps: row.state === 'in-review' ? namedGaps(review, entries, names) : [],

@@ -214,6 +214,7 @@ export const texts = {
       'one-occurrence-only': 'its star has this day only once in {{year}}.',
       'fewer-of-them': '{{year}} has fewer of them.',
       waits: 'its days are counted once the work before it is done.',
+      countedFrom: 'its days are counted from the day of “{{title}}”, once that is done.',
       anchor: 'the work that it is counted from has no day.',
       closed: 'the last advised date, {{date}} ({{source}}), comes before its best days.',
     },

@@ -34,6 +34,7 @@ export const texts = {
     versions: 'All versions',
     entries: 'Entries',
     entriesHint: 'As they were frozen. Nothing here changes any more.',
+    doneSince: 'Since this was frozen: “{{title}}” was done on {{days}}. Counted from that: {{window}}.',
     moreOfIt: 'Everything it says',
     seal: 'Seal of this entry',
     strip: 'The year as a strip',

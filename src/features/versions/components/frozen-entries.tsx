@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { boardOf } from '#shared/calendar/variants.js';
-import type { Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
+import type { DoneSince, Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
+import { useEntryTitles } from '#src/lib/entry-titles.js';
 import { BoardLine } from '#src/lib/board-line.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
@@ -33,7 +34,13 @@ export function FrozenEntries({ version, about }: FrozenEntriesProps) {
       <ol className="frozen-entries">
         {entries.map((entry) => (
           <li key={entry.entryId}>
-            <FrozenEntry entry={entry} header={header} markers={markers} about={about} />
+            <FrozenEntry
+              entry={entry}
+              header={header}
+              markers={markers}
+              done={version.doneSince?.find(({ entryId }) => entryId === entry.entryId)}
+              about={about}
+            />
           </li>
         ))}
       </ol>
@@ -46,10 +53,12 @@ interface FrozenEntryProps {
   entry: VersionEntry;
   header: VersionHeader;
   markers: NamesByKey;
+  /** What was done since, where it is counted from that. */
+  done: DoneSince | undefined;
   about: FrozenEntriesProps['about'];
 }
 
-function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
+function FrozenEntry({ entry, header, markers, done, about }: FrozenEntryProps) {
   const words = useEntryWords();
   const dateWords = useDateWords();
   const { content, dates } = entry;
@@ -73,6 +82,7 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
           <strong>{words.window(content, dates.window, year)}</strong>
         </p>
         <p className="range-line">{words.lead(content, markers)}</p>
+        {done && <DoneLine done={done} content={content} year={year} />}
         {board && (
           <WindowBar
             className="mt-2"
@@ -93,6 +103,28 @@ function FrozenEntry({ entry, header, markers, about }: FrozenEntryProps) {
         {about?.(entry)}
       </div>
     </div>
+  );
+}
+
+/** Said beside what was frozen, never in its place. */
+function DoneLine({
+  done: { anchorId, from, to, window },
+  content,
+  year,
+}: {
+  done: DoneSince;
+  content: VersionEntry['content'];
+  year: number;
+}) {
+  const { t } = useTranslation(['versions', 'anchors']);
+  const words = useEntryWords();
+  const dates = useDateWords();
+  const title = useEntryTitles().get(anchorId) ?? t('anchors:another');
+  const days = to === null ? dates.day(from) : dates.range(from, to);
+  return (
+    <p className="range-line">
+      {t('page.doneSince', { title, days, window: words.window(content, window, year) })}
+    </p>
   );
 }
 

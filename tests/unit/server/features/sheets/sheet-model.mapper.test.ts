@@ -305,6 +305,16 @@ describe('the rest of the sheet', () => {
     expect(sheet.officerLanguage).toBe('en');
   });
 
+  it('names the work from whose day something is counted, where that is on the board', () => {
+    const sow = body({ titleOfficer: 'Sow' });
+    const waiting: Partial<EntryDates> = { marker: null, window: null, warnings: ['waits-for-actual-day'] };
+    const weed = body({ lead: { type: 'entry-actual', entryId: sow.entryId } }, waiting);
+    expect(model([sow, weed]).entries[1]?.whyNoDate).toBe(
+      'its days are counted from the day of “Sow”, once that is done.',
+    );
+    expect(model([weed]).entries[0]?.whyNoDate).toBe('its days are counted once the work before it is done.');
+  });
+
   it('says what a mended board says otherwise than the one before it, and nothing of what is not printed', () => {
     const sow = body({ titleOfficer: 'Sow' });
     const weed = body({ titleOfficer: 'Weed' });
