@@ -145,7 +145,7 @@ async function furnishOwn(): Promise<Village> {
     ownEntryId: kept.id,
     personId: added.person.id,
     figureId,
-    ...(await aSeenSign(village.officer)),
+    ...(await aSeenSign(village.officer, village.elder)),
     attachmentId: (await addPicture(village.elder, figureId)).id,
     feedKey: feed.key,
     withdrawalId: await aWithdrawal(village.officer.communityId),
@@ -176,7 +176,7 @@ async function furnishOther(): Promise<Village> {
     ownEntryId: entry.id,
     personId: officer.personId,
     figureId,
-    ...(await aSeenSign(officer)),
+    ...(await aSeenSign(officer, officer)),
     attachmentId: (await addPicture(officer, figureId)).id,
     feedKey: '',
     withdrawalId: await aWithdrawal(home.community.id),
@@ -195,8 +195,8 @@ async function rolledFrom(officer: Client, calendarId: string): Promise<string> 
   return (answer.body as { calendarId: string }).calendarId;
 }
 
-async function aSeenSign(officer: Client): Promise<{ signId: string; seenId: string }> {
-  const { id, seen } = await markSeen(officer, await addSign(officer));
+async function aSeenSign(officer: Client, marker: Client): Promise<{ signId: string; seenId: string }> {
+  const { id, seen } = await markSeen(marker, await addSign(officer));
   return { signId: id, seenId: seen[0]?.id ?? '' };
 }
 

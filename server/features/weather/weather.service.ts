@@ -84,11 +84,11 @@ export class WeatherService {
     });
   }
 
+  /** One that is down already stays so. */
   async removeNotice(actor: Actor, id: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
       const { affected } = await manager.delete(WeatherNoticeEntity, { id, communityId: actor.communityId });
-      if ((affected ?? 0) === 0) throw notFound();
-      await this.record(manager, actor, 'notice-removed', id);
+      if ((affected ?? 0) > 0) await this.record(manager, actor, 'notice-removed', id);
     });
   }
 
@@ -111,10 +111,11 @@ export class WeatherService {
     });
   }
 
+  /** What is out already stays so. */
   async removeRain(actor: Actor, id: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
       const row = await manager.findOneBy(RainDayEntity, { id, communityId: actor.communityId });
-      if (row === null) throw notFound();
+      if (row === null) return;
       if (!isTheirs(actor, row)) throw conflict('not-the-marker');
       await manager.delete(RainDayEntity, { id });
       await this.record(manager, actor, 'rain-removed', id);
