@@ -33,6 +33,7 @@ import { texts as sheets } from './en/sheets.js';
 import { texts as signs } from './en/signs.js';
 import { texts as sky } from './en/sky.js';
 import { texts as stars } from './en/stars.js';
+import { texts as strip } from './en/strip.js';
 import { texts as today } from './en/today.js';
 import { texts as variants } from './en/variants.js';
 import { texts as versions } from './en/versions.js';
@@ -55,6 +56,7 @@ export const en = {
   people,
   places,
   stars,
+  strip,
   finder,
   decades,
   drift,

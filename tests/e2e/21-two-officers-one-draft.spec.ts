@@ -198,3 +198,59 @@ test('what was on its way when the page went is sent again by itself, once', asy
   await page.getByRole('dialog').getByRole('button', { name: 'Submit it' }).click();
   await expect(page).toHaveURL(/versions\/1$/u);
 });
+
+test('windows are moved on the strip by keys and by hand, and saved like anything else', async ({ page }) => {
+  await signIn(page, 'officer');
+  const calendarId = await beginEmptyCalendar(page, 2033);
+  await putIn(page, calendarId, 'Mend the walls', 1);
+  await putIn(page, calendarId, 'Weed', 20);
+  await page.goto(`/calendars/${calendarId}`);
+  const bar = (title: string) => page.getByRole('slider', { name: `Move the days of ${title}` });
+  await bar('Mend the walls').focus();
+  await page.keyboard.press('ArrowRight');
+  await page.keyboard.press('Shift+ArrowRight');
+  await expect(bar('Mend the walls')).toHaveAttribute('aria-valuetext', /^Possible from 12.June/u);
+  await page.keyboard.press('ArrowDown');
+  await expect(bar('Weed')).toBeFocused();
+  await page.keyboard.press('Enter');
+  await expect(page.getByRole('heading', { name: /^Weed/ })).toBeVisible();
+
+  await page.getByRole('radio', { name: 'Month' }).check({ force: true });
+  const box = await bar('Weed').boundingBox();
+  if (box === null) throw new Error('the bar is not there');
+  const pxPerDay = box.width / 15;
+  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  await page.mouse.move(x - 2.2 * pxPerDay, y, { steps: 4 });
+  await page.mouse.up();
+  await expect(bar('Weed')).toHaveAttribute('aria-valuetext', /^Possible from 18.June/u);
+
+  await page.getByText('How the strip is shown').click();
+  await page.getByLabel('Second scale').selectOption('market');
+  await page.getByText('Market weeks as a table').click();
+  await expect(page.getByRole('rowheader', { name: /^Market week from/ }).first()).toBeVisible();
+  await page.getByText('Show as a table').click();
+  await page.getByLabel('Name of Weed').fill('Weed twice');
+  await page.getByLabel('Days to last, Weed twice').fill('16');
+  await expectNoSidewaysScroll(page);
+  await page.getByRole('button', { name: 'Save all 2 changed entries' }).click();
+  await expect(page.locator('.toast', { hasText: 'Saved: Weed twice.' })).toBeVisible();
+  await page.reload();
+  await expect(bar('Mend the walls')).toHaveAttribute('aria-valuetext', /^Possible from 12.June/u);
+  await expect(bar('Weed twice')).toHaveAttribute(
+    'aria-valuetext',
+    /^Possible from 18.June.*advised 6.July/u,
+  );
+
+  await page.setViewportSize({ width: 320, height: 700 });
+  await page.goto(`/calendars/${calendarId}`);
+  await page.getByText('The year as a strip').click();
+  await expect(bar('Weed twice')).toBeVisible();
+  await page.getByText('Show as a table').click();
+  await expectNoSidewaysScroll(page);
+  await page.evaluate(() => {
+    scrollTo(0, 0);
+  });
+  await expectAccessible(page);
+});

@@ -44,7 +44,8 @@ export function MonthLines({ span, months }: { span: DaySpan; months: readonly S
     >
       {months.map(
         (month) =>
-          month.dayNumber > span.first && (
+          month.dayNumber > span.first &&
+          month.dayNumber <= span.last && (
             <rect
               key={month.dayNumber}
               className="pic-month-line"

@@ -1,10 +1,10 @@
-import type { ReactNode } from 'react';
+import { useMemo, type ReactNode } from 'react';
 import { Peg } from '../pegs.js';
 import { percent, startPercent, type DaySpan } from './day-span.js';
-import { DayHandles, type HandleWords, type MovePart } from './day-handles.js';
+import { BarSurface, type BarMoves, type SurfaceBar } from './bar-surface.js';
 import { MarkLane } from './mark-lane.js';
 import { MonthLines, MonthScale, type ScaleMonth } from './month-scale.js';
-import { packBars, type PlacedBar } from './pack-bars.js';
+import { packBars, type BarToPlace, type PlacedBar } from './pack-bars.js';
 import type { RangeMark } from './ring-row.js';
 import { useTextWidth } from './use-text-width.js';
 import { useWidth } from '../use-width.js';
@@ -50,9 +50,10 @@ export interface YearBoardProps {
   chosen?: string | null | undefined;
   pairing?: BoardPairing | null | undefined;
   onChoose?: ((key: string) => void) | undefined;
-  /** Lets the chosen window be moved: the whole of it, its beginning or its end. */
-  onMove?: ((part: MovePart, days: number) => void) | undefined;
-  handleWords?: HandleWords | undefined;
+  /** Lets windows be moved: the whole of one, its beginning or its end. */
+  moves?: BarMoves | undefined;
+  /** A second scale under the months: Moons, market weeks, another calendar. */
+  secondScale?: { name: string; parts: readonly ScaleMonth[] } | undefined;
 }
 
 const LANE_HEIGHT = 24;
@@ -68,21 +69,15 @@ const LABEL_LEAST = 96;
 
 /** The year's strip: lanes of the stars above, windows as bars below, today's peg through all of it. */
 export function YearBoard(props: YearBoardProps) {
-  const { span, months, lanes, bars, barsName, label, today, chosen, pairing, onChoose } = props;
+  const { span, months, lanes, bars, barsName, label, today, chosen, pairing, onChoose, moves } = props;
   const [ref, width] = useWidth(900);
   const textWidth = useTextWidth(LABEL_SIZE);
   const pxPerDay = width / (span.last - span.first + 1);
   const labelMax = Math.max(LABEL_LEAST, width * LABEL_SHARE_MAX);
-  const placed = packBars(
-    bars
-      .filter((bar) => bar.days.lastAdvised >= span.first && bar.days.earliest <= span.last)
-      .map((bar) => ({
-        key: bar.key,
-        startPx: (Math.max(bar.days.earliest, span.first) - span.first) * pxPerDay,
-        endPx: (Math.min(bar.days.lastAdvised, span.last) + 1 - span.first) * pxPerDay,
-        labelPx: Math.min(labelMax, textWidth(bar.name) + 8),
-      })),
-    width,
+  const byKey = useMemo(() => new Map(bars.map((bar) => [bar.key, bar])), [bars]);
+  const placed = useMemo(
+    () => packBars(barsToPlace({ bars, span, pxPerDay, labelMax, textWidth }), width),
+    [bars, span, pxPerDay, labelMax, textWidth, width],
   );
   const hasPeg = today !== undefined && today !== null && today >= span.first && today <= span.last;
   const lanesTop = hasPeg ? PEG_ROOM : 6;
@@ -91,15 +86,31 @@ export function YearBoard(props: YearBoardProps) {
   const rows = Math.max(1, ...placed.map(({ row }) => row + 1));
   const height = barsTop + rows * BAR_PITCH + 4;
   const barY = (bar: PlacedBar) => barsTop + bar.row * BAR_PITCH;
-  const barOf = (key: string) => bars.find((bar) => bar.key === key);
+  const barOf = (key: string) => byKey.get(key);
   const chosenPlace = placed.find(({ key }) => key === chosen);
   const chosenBar = chosenPlace === undefined ? undefined : barOf(chosenPlace.key);
+  const surface = useMemo(
+    () =>
+      placed.flatMap(({ key, row }): SurfaceBar[] => {
+        const bar = byKey.get(key);
+        return bar ? [{ key, days: bar.days, kind: bar.kind, topPx: barsTop + row * BAR_PITCH }] : [];
+      }),
+    [placed, byKey, barsTop],
+  );
   const pairedLane = lanes.findIndex(({ key }) => key === pairing?.laneKey);
 
   return (
     <div className="year-board">
       <div />
       <MonthScale span={span} months={months} />
+      {props.secondScale && (
+        <>
+          <div className="year-board-name text-small text-umber-soft" aria-hidden>
+            <span title={props.secondScale.name}>{props.secondScale.name}</span>
+          </div>
+          <MonthScale span={span} months={props.secondScale.parts} />
+        </>
+      )}
       <div className="year-board-names" aria-hidden style={{ paddingTop: lanesTop }}>
         {lanes.map((lane) => (
           <div key={lane.key} className="year-board-name" style={{ height: LANE_PITCH }}>
@@ -184,18 +195,36 @@ export function YearBoard(props: YearBoardProps) {
             )
           );
         })}
-        {chosenPlace && chosenBar && props.onMove && props.handleWords && (
-          <DayHandles
-            span={span}
-            days={chosenBar.days}
-            pxPerDay={pxPerDay}
-            top={barY(chosenPlace)}
-            height={BAR_HEIGHT}
-            words={props.handleWords}
-            onMove={props.onMove}
+        {moves && onChoose && (
+          <BarSurface
+            {...{ span, pxPerDay, moves }}
+            barHeightPx={BAR_HEIGHT}
+            bars={surface}
+            chosen={chosen ?? null}
+            onOpen={onChoose}
           />
         )}
       </div>
     </div>
   );
+}
+
+interface ToPlace {
+  bars: readonly BoardBar[];
+  span: DaySpan;
+  pxPerDay: number;
+  labelMax: number;
+  textWidth: (text: string) => number;
+}
+
+/** Bars that reach into the span, cut at its ends. */
+function barsToPlace({ bars, span, pxPerDay, labelMax, textWidth }: ToPlace): BarToPlace[] {
+  return bars
+    .filter((bar) => bar.days.lastAdvised >= span.first && bar.days.earliest <= span.last)
+    .map((bar) => ({
+      key: bar.key,
+      startPx: (Math.max(bar.days.earliest, span.first) - span.first) * pxPerDay,
+      endPx: (Math.min(bar.days.lastAdvised, span.last) + 1 - span.first) * pxPerDay,
+      labelPx: Math.min(labelMax, textWidth(bar.name) + 8),
+    }));
 }

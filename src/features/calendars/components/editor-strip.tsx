@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
+import type { EntryOffsets } from '#shared/contracts/calendars.js';
 import { useCurrentPlace } from '#src/lib/community.js';
-import { useDateWords } from '#src/lib/date-words.js';
 import { dayNumberOf, todayIn } from '#src/lib/days.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { useLaneWords } from '#src/lib/lane-words.js';
@@ -10,31 +10,48 @@ import { More } from '#src/ui/fold.js';
 import { useSignLanes } from '#src/lib/sign-lanes.js';
 import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
-import type { MovePart } from '#src/ui/pictures/day-handles.js';
 import { YearBoard } from '#src/ui/pictures/year-board.js';
-import type { FormState } from '../model/form-state.js';
-import { endMoved, shifted, startMoved } from '../model/offsets.js';
 import type { ShownEntry } from '../model/preview-dates.js';
 import { barsOf, lanesOf, pairingOf, undatedOf } from '../model/strip-model.js';
 import type { Editor } from '../model/use-editor.js';
-import { yearSpan } from '../model/year-span.js';
+import type { DraftChange } from '../model/use-entry-edits.js';
+import type { SaveEntry } from '../model/use-save-entry.js';
+import { useStrip } from '../model/use-strip.js';
+import { changeEntry, mayWriteHere, useStripMoves } from '../model/use-strip-moves.js';
+import { ScaleTable } from './scale-table.js';
 import { StripTable } from './strip-table.js';
+import { StripSettings, StripTools } from './strip-tools.js';
 
 const NO_NAMES: NamesByKey = new Map();
 
 /** The year above the list and the form: every star in use as a lane, every entry as a bar. */
-export function EditorStrip({ editor, form }: { editor: Editor; form: FormState | null }) {
-  const { t, i18n } = useTranslation(['calendars', 'sky']);
-  const dates = useDateWords();
+export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEntry }) {
+  const { t, i18n } = useTranslation(['calendars', 'sky', 'strip']);
   const words = useEntryWords();
   const laneWords = useLaneWords();
   const today = useToday(editor);
-  const { calendar, shown, selected, markers, selection, canWriteSelected } = editor;
+  const { calendar, shown, selected, markers, selection, canWrite } = editor;
   const { year } = calendar;
+  const strip = useStrip(editor);
+  const moves = useStripMoves(editor, strip.zoomBy);
   const byKey = markers.data?.byKey ?? null;
   const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
   const nameOf = (entry: ShownEntry) => entry.content.titleOfficer || t('editor.untitled');
   const undated = undatedOf(shown);
+  const inTable = (entryId: string, change: DraftChange) => {
+    const entry = shown.find(({ id }) => id === entryId);
+    if (entry) changeEntry(editor, entry, change);
+  };
+  const ways = {
+    mayWrite: (entry: ShownEntry) => mayWriteHere(editor, entry),
+    rename: (entryId: string, titleOfficer: string) => {
+      inTable(entryId, { titleOfficer });
+    },
+    setOffset: (entryId: string, name: keyof EntryOffsets, days: number) => {
+      inTable(entryId, ({ offsets }) => ({ offsets: { ...offsets, [name]: days } }));
+    },
+    save: (entryId: string) => void saving.saveOne(entryId),
+  };
   const label =
     selected === null
       ? t('strip.picture', { year, count: shown.length })
@@ -46,9 +63,16 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
         });
   return (
     <section className="board mb-4" aria-label={t('strip.label')}>
+      <StripTools
+        strip={strip}
+        unsavedCount={editor.unsavedIds.length}
+        isSaving={saving.isSaving}
+        onSaveAll={() => void saving.saveAll()}
+      />
       <YearBoard
-        span={yearSpan(year)}
-        months={dates.months(year)}
+        span={strip.span}
+        months={strip.months}
+        secondScale={strip.second ?? undefined}
         lanes={[
           ...lanesOf(shown, byKey).map((row) => ({
             key: row.markerKey,
@@ -66,10 +90,7 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
         chosen={selected?.id ?? null}
         pairing={pairingOf(selected)}
         onChoose={selection.open}
-        onMove={
-          canWriteSelected && form && !editor.stale ? (part, days) => moveDays(form, part, days) : undefined
-        }
-        handleWords={selected ? handleWords(selected) : undefined}
+        moves={canWrite ? moves : undefined}
       />
       {markers.isError && <p className="text-small">{t('editor.stripTrouble')}</p>}
       {undated.length > 0 && shown.length > 0 && (
@@ -83,39 +104,22 @@ export function EditorStrip({ editor, form }: { editor: Editor; form: FormState 
       )}
       <div className="flex flex-wrap gap-x-6">
         <More label={t('strip.howToRead')}>
+          {canWrite && <p>{t('strip:howToMove')}</p>}
           <LaneKey />
           <div className="mt-2">
             <WindowKey kinds={['best', 'margin', 'watch', 'fixed']} />
           </div>
         </More>
         <More label={t('strip.asTable')}>
-          <StripTable entries={shown} year={year} markers={byKey ?? new Map()} />
+          <StripTable entries={shown} year={year} markers={byKey ?? NO_NAMES} ways={canWrite ? ways : null} />
         </More>
+        <More label={t('strip:tools')}>
+          <StripSettings strip={strip} yearStart={editor.community?.yearStart.date ?? null} />
+        </More>
+        {strip.second && <ScaleTable {...strip.second} />}
       </div>
     </section>
   );
-
-  function handleWords(entry: ShownEntry) {
-    const title = nameOf(entry);
-    const { window } = entry.dates ?? { window: null };
-    return {
-      label: {
-        all: t('strip.move.all', { title }),
-        start: t('strip.move.start', { title }),
-        end: t('strip.move.end', { title }),
-      },
-      value: {
-        all: window ? words.windowSentence(window) : '',
-        start: window ? dates.day(window.earliest) : '',
-        end: window ? dates.day(window.lastAdvised) : '',
-      },
-    };
-  }
-}
-
-function moveDays(form: FormState, part: MovePart, days: number): void {
-  const change = { all: shifted, start: startMoved, end: endMoved }[part];
-  form.change(({ offsets }) => ({ offsets: change(offsets, days) }));
 }
 
 /** Today at the calendar's place. */

@@ -1,9 +1,10 @@
 import { Plus } from 'lucide-react';
-import type { ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { NoticesAbove } from '#src/lib/notices-above.js';
 import { paths } from '#src/lib/paths.js';
 import { Button } from '#src/ui/button.js';
+import { Fold } from '#src/ui/fold.js';
 import { Mast, Page, ThumbBar } from '#src/ui/page.js';
 import type { FormState } from '../model/form-state.js';
 import type { ShownEntry } from '../model/preview-dates.js';
@@ -33,7 +34,7 @@ export interface ViewParts {
 /** From 1024 px: the strip above, the entry beside the list. */
 export function WideView(parts: ViewParts) {
   const { t } = useTranslation('calendars');
-  const { editor, actions, form, saving } = parts;
+  const { editor, actions, saving } = parts;
   const closed = useSaveReason(editor, saving);
   return (
     <Page>
@@ -50,7 +51,7 @@ export function WideView(parts: ViewParts) {
       </Mast>
       <Notes {...parts} />
       <ListState editor={editor}>
-        <EditorStrip editor={editor} form={form} />
+        <EditorStrip editor={editor} saving={saving} />
         <div className="editor-columns">
           <EntryList editor={editor} actions={actions} />
           <OpenEntry {...parts} />
@@ -73,6 +74,7 @@ export function ListView(parts: ViewParts) {
       <Notes {...parts} />
       <ListState editor={editor}>
         <EntryList editor={editor} actions={actions} />
+        <StripFold {...parts} />
       </ListState>
       <div className="mt-4 flex flex-wrap gap-3">
         <ToolLinks {...parts} />
@@ -85,6 +87,17 @@ export function ListView(parts: ViewParts) {
         </ThumbBar>
       )}
     </Page>
+  );
+}
+
+/** On a phone the strip is drawn only when somebody wants it. */
+function StripFold({ editor, saving }: ViewParts) {
+  const { t } = useTranslation('calendars');
+  const [isOpen, setIsOpen] = useState(false);
+  return (
+    <Fold title={t('strip.label')} open={isOpen} onToggle={setIsOpen}>
+      {isOpen && <EditorStrip editor={editor} saving={saving} />}
+    </Fold>
   );
 }
 

@@ -1,30 +1,47 @@
+import { useEffect, useMemo, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
 import { Table } from '#src/ui/table.js';
+import { OFFSETS } from '../model/offsets.js';
 import type { ShownEntry } from '../model/preview-dates.js';
+import { StripRowFields, type StripRowWays } from './strip-row-fields.js';
 
 const COLUMNS = ['entry', 'lead', 'earliest', 'bestFrom', 'bestTo', 'lastAdvised'] as const;
 const DAYS = ['earliest', 'bestFrom', 'bestTo', 'lastAdvised'] as const;
 
-/** The strip as a table. */
-export function StripTable({
-  entries,
-  year,
-  markers,
-}: {
+interface StripTableProps {
   entries: readonly ShownEntry[];
   year: number;
   markers: NamesByKey;
-}) {
-  const { t } = useTranslation('calendars');
+  /** Names and days can be written here; null where they are only read. */
+  ways: (StripRowWays & { mayWrite: (entry: ShownEntry) => boolean }) | null;
+}
+
+/** The strip as a table, which can be written in. */
+export function StripTable({ entries, year, markers, ways }: StripTableProps) {
+  const { t } = useTranslation(['calendars', 'strip']);
   const dates = useDateWords();
   const words = useEntryWords();
+  const steady = useSteady(ways);
+  const days = ({ dates: found }: ShownEntry) =>
+    found?.window ? (
+      DAYS.map((day) => <td key={day}>{found.window && dates.day(found.window[day], 'short')}</td>)
+    ) : (
+      <td colSpan={DAYS.length}>{t('days.none', { year })}</td>
+    );
   return (
-    <Table caption={t('strip.tableCaption', { year })}>
+    <Table caption={t('strip.tableCaption', { year })} middle>
       <thead>
         <tr>
-          {COLUMNS.map((column) => (
+          <th scope="col">{t('strip.column.entry')}</th>
+          {ways &&
+            [...OFFSETS, 'save' as const].map((column) => (
+              <th key={column} scope="col">
+                {t(`strip:column.${column}`)}
+              </th>
+            ))}
+          {COLUMNS.slice(1).map((column) => (
             <th key={column} scope="col">
               {t(`strip.column.${column}`)}
             </th>
@@ -32,18 +49,43 @@ export function StripTable({
         </tr>
       </thead>
       <tbody>
-        {entries.map(({ id, content, dates: found }) => (
-          <tr key={id}>
-            <th scope="row">{content.titleOfficer || t('editor.untitled')}</th>
-            <td>{words.leadAlone(content, markers)}</td>
-            {found?.window ? (
-              DAYS.map((day) => <td key={day}>{found.window && dates.day(found.window[day], 'short')}</td>)
+        {entries.map((entry) => (
+          <tr key={entry.id}>
+            {ways?.mayWrite(entry) === true ? (
+              <StripRowFields
+                entryId={entry.id}
+                title={entry.content.titleOfficer}
+                offsets={entry.content.offsets}
+                unsaved={entry.unsaved}
+                ways={steady}
+              />
             ) : (
-              <td colSpan={DAYS.length}>{t('days.none', { year })}</td>
+              <>
+                <th scope="row">{entry.content.titleOfficer || t('editor.untitled')}</th>
+                {ways && <td colSpan={OFFSETS.length + 1} />}
+              </>
             )}
+            <td>{words.leadAlone(entry.content, markers)}</td>
+            {days(entry)}
           </tr>
         ))}
       </tbody>
     </Table>
+  );
+}
+
+/** The same functions at every drawing, so that a row is drawn again only where it changed. */
+function useSteady(ways: StripRowWays | null): StripRowWays {
+  const latest = useRef(ways);
+  useEffect(() => {
+    latest.current = ways;
+  });
+  return useMemo(
+    () => ({
+      rename: (entryId, title) => latest.current?.rename(entryId, title),
+      setOffset: (entryId, name, days) => latest.current?.setOffset(entryId, name, days),
+      save: (entryId) => latest.current?.save(entryId),
+    }),
+    [],
   );
 }

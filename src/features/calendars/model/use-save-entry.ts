@@ -16,6 +16,8 @@ import { useTakeEntry } from '../api/entry-mutations.js';
 import { draftOf } from './entry-draft.js';
 import { NO_PROBLEMS, problemsFrom, problemsOf, type FieldProblems } from './field-problems.js';
 import { useDeliver } from './use-deliver.js';
+import type { ShownEntry } from './preview-dates.js';
+import { isStale } from './shown-entries.js';
 import type { Editor } from './use-editor.js';
 import { useSendAgain } from './use-send-again.js';
 
@@ -31,6 +33,10 @@ interface Refused {
 
 export interface SaveEntry {
   save: () => Promise<void>;
+  /** The same for one that need not be open. */
+  saveOne: (entryId: string) => Promise<void>;
+  /** One after the other; where one is refused it is opened, and the others wait. */
+  saveAll: () => Promise<void>;
   /** Saves a text that was joined from two; `theirs` is the saved state that it was joined over. */
   saveJoined: (content: EntryInput, theirs: Entry) => Promise<void>;
   /** Opens the choice between two texts of an entry. */
@@ -76,11 +82,12 @@ export function useSaveEntry(editor: Editor): SaveEntry {
     }
   };
 
-  const send = async (entryId: string, content: EntryInput, version: number | null) => {
+  /** @returns whether it is saved */
+  const send = async (entryId: string, content: EntryInput, version: number | null): Promise<boolean> => {
     const parsed = entryInput.safeParse(content);
     if (!parsed.success) {
       refuse(entryId, content, NO_PROBLEMS, null);
-      return;
+      return false;
     }
     try {
       const saved = await deliver.send(entryId, parsed.data, version);
@@ -88,22 +95,41 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       setChoosingId(null);
       if (saved.id !== entryId) selection.open(saved.id);
       say(t('editor.saved', { title: saved.content.titleOfficer }));
+      return true;
     } catch (cause) {
       meet(cause, entryId, content);
+      return false;
     }
+  };
+
+  const saveOne = async ({ id, saved, content }: ShownEntry): Promise<boolean> => {
+    const edit = edits.all.get(id);
+    if (!edit?.sending && isStale(saved, edit)) {
+      setChoosingId(id);
+      return false;
+    }
+    return send(id, content, edit?.baseVersion ?? saved?.version ?? null);
+  };
+  const saveOrOpen = async (entry: ShownEntry): Promise<boolean> => {
+    const isSaved = await saveOne(entry);
+    if (!isSaved) selection.open(entry.id);
+    return isSaved;
   };
 
   const isRefused = refused !== null && selected !== null && refused.entryId === selected.id;
   const isUnchanged = isRefused && sameJson(refused.content, selected.content);
   return {
     save: async () => {
-      if (selected === null) return;
-      if (editor.stale) {
-        setChoosingId(selected.id);
-        return;
+      if (selected !== null) await saveOne(selected);
+    },
+    saveOne: async (entryId) => {
+      const entry = editor.shown.find(({ id }) => id === entryId);
+      if (entry) await saveOrOpen(entry);
+    },
+    saveAll: async () => {
+      for (const entry of editor.shown) {
+        if (entry.unsaved && !(await saveOrOpen(entry))) return;
       }
-      const version = editor.edits.all.get(selected.id)?.baseVersion ?? selected.saved?.version ?? null;
-      await send(selected.id, selected.content, version);
     },
     saveJoined: async (content, theirs) => {
       const base = theirs.content;

@@ -1,0 +1,31 @@
+import { useTranslation } from 'react-i18next';
+import { useDateWords } from '#src/lib/date-words.js';
+import { More } from '#src/ui/fold.js';
+import { Table } from '#src/ui/table.js';
+import type { ScalePart } from '../model/strip-scale.js';
+
+/** The second scale in words: what each part is called and when it begins. */
+export function ScaleTable({ name, parts }: { name: string; parts: readonly ScalePart[] }) {
+  const { t } = useTranslation('strip');
+  const dates = useDateWords();
+  return (
+    <More label={t('scaleTable', { scale: name })}>
+      <Table caption={name}>
+        <thead>
+          <tr>
+            <th scope="col">{t('part')}</th>
+            <th scope="col">{t('begins')}</th>
+          </tr>
+        </thead>
+        <tbody>
+          {parts.map(({ dayNumber, long }) => (
+            <tr key={dayNumber}>
+              <th scope="row">{long}</th>
+              <td>{dates.day(dayNumber)}</td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+    </More>
+  );
+}

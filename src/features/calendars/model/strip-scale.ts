@@ -1,0 +1,85 @@
+import { dateOfDayNumber, utcDate } from '#src/lib/days.js';
+import type { DaySpan } from '#src/ui/pictures/day-span.js';
+import type { ScaleMonth } from '#src/ui/pictures/month-scale.js';
+
+/** A part of a second scale: a Moon, a market week, a month of another calendar. */
+export interface ScalePart extends ScaleMonth {
+  long: string;
+}
+
+export const MARKET_DAYS_MIN = 2;
+export const MARKET_DAYS_MAX = 20;
+
+/**
+ * Weeks of so many days, counted from a market day; the first one may have begun before the span.
+ * @param name what a week is called, by its first day and its number from the market day, which is 0
+ */
+export function marketWeeks(
+  span: DaySpan,
+  weekDays: number,
+  marketDay: number,
+  name: (firstDay: number, number: number) => Pick<ScalePart, 'short' | 'narrow' | 'long'>,
+): ScalePart[] {
+  const parts: ScalePart[] = [];
+  let number = Math.floor((span.first - marketDay) / weekDays);
+  for (let day = marketDay + number * weekDays; day <= span.last; day += weekDays) {
+    parts.push({ dayNumber: day, days: weekDays, ...name(day, number) });
+    number += 1;
+  }
+  return parts;
+}
+
+/** Runs from each start to the next one; what lies outside the span is left out. */
+export function runsFrom(
+  starts: readonly { dayNumber: number; short: string; narrow: string; long: string }[],
+  span: DaySpan,
+): ScalePart[] {
+  return starts
+    .map((start, index) => {
+      const next = starts[index + 1]?.dayNumber ?? span.last + 1;
+      return { ...start, days: Math.max(1, next - start.dayNumber) };
+    })
+    .filter(({ dayNumber, days }) => dayNumber <= span.last && dayNumber + days > span.first);
+}
+
+/** Every day of a span, for the closest look. */
+export function daysOf(span: DaySpan, name: (dayNumber: number) => string): ScalePart[] {
+  return Array.from({ length: span.last - span.first + 1 }, (_, index) => {
+    const dayNumber = span.first + index;
+    const short = String(dateOfDayNumber(dayNumber).day);
+    return { dayNumber, days: 1, short, narrow: short, long: name(dayNumber) };
+  });
+}
+
+/** Months of a civil calendar that the browser knows, by its CLDR name; the first and the last are cut by the span. */
+export function civilMonths(span: DaySpan, calendar: string, locale: string): ScalePart[] {
+  const format = (month: 'short' | 'narrow' | 'long') =>
+    new Intl.DateTimeFormat(locale, { calendar, month, year: 'numeric', timeZone: 'UTC' });
+  const [short, narrow, long] = [format('short'), format('narrow'), format('long')];
+  const monthIn = (parts: readonly Intl.DateTimeFormatPart[]) =>
+    parts.find(({ type }) => type === 'month')?.value ?? '';
+  const starts: Omit<ScalePart, 'days'>[] = [];
+  let before = '';
+  for (let dayNumber = span.first; dayNumber <= span.last; dayNumber += 1) {
+    const date = utcDate(dateOfDayNumber(dayNumber));
+    const whole = long.format(date);
+    if (whole === before) continue;
+    before = whole;
+    starts.push({
+      dayNumber,
+      short: monthIn(short.formatToParts(date)),
+      narrow: monthIn(narrow.formatToParts(date)),
+      long: whole,
+    });
+  }
+  return runsFrom(starts, span);
+}
+
+/** Calendars that this browser knows besides the Gregorian one, with their names. */
+export function knownCalendars(locale: string): { calendar: string; name: string }[] {
+  const names = new Intl.DisplayNames(locale, { type: 'calendar', fallback: 'code' });
+  return Intl.supportedValuesOf('calendar')
+    .filter((calendar) => calendar !== 'gregory' && calendar !== 'iso8601')
+    .map((calendar) => ({ calendar, name: names.of(calendar) ?? calendar }))
+    .sort((a, b) => a.name.localeCompare(b.name, locale));
+}

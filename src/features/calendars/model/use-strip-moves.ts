@@ -1,0 +1,65 @@
+import { useMemo } from 'react';
+import { useTranslation } from 'react-i18next';
+import { useDateWords } from '#src/lib/date-words.js';
+import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
+import type { BarMoves } from '#src/ui/pictures/bar-surface.js';
+import type { DraftChange } from './use-entry-edits.js';
+import { isStale } from './shown-entries.js';
+import type { ShownEntry } from './preview-dates.js';
+import { movedDays, movedOffsets } from './strip-moves.js';
+import type { Editor } from './use-editor.js';
+
+const NOWHERE = { earliest: 0, bestFrom: 0, bestTo: 0, lastAdvised: 0 };
+
+/** An entry that this person may write on the strip and in its table now. */
+export function mayWriteHere({ canWrite, edits }: Editor, entry: ShownEntry): boolean {
+  return canWrite && (entry.saved?.mine ?? true) && !isStale(entry.saved, edits.all.get(entry.id));
+}
+
+export function changeEntry({ edits, newStart }: Editor, entry: ShownEntry, change: DraftChange): void {
+  edits.change(entry.id, entry.saved ?? newStart, change);
+}
+
+/** Moving windows on the strip: a change of the entry's four days like any other. */
+export function useStripMoves(editor: Editor, onZoom: (step: 1 | -1) => void): BarMoves {
+  const { t } = useTranslation(['calendars', 'strip']);
+  const dates = useDateWords();
+  const words = useEntryWords();
+  return useMemo(() => {
+    const byId = new Map(editor.shown.map((entry) => [entry.id, entry]));
+    const titleOf = (entry: ShownEntry | undefined) => entry?.content.titleOfficer || t('editor.untitled');
+    const windowOf = (key: string) => byId.get(key)?.dates?.window ?? null;
+    const mayMove = (key: string) => {
+      const entry = byId.get(key);
+      return entry !== undefined && mayWriteHere(editor, entry);
+    };
+    return {
+      mayMove,
+      onMove: (key, part, days) => {
+        const entry = byId.get(key);
+        if (!entry || !mayMove(key)) return;
+        changeEntry(editor, entry, ({ offsets }) => ({ offsets: movedOffsets(offsets, part, days) }));
+        // On a wide screen the form beside follows; on a phone it would cover the strip.
+        if (editor.selection.isWide) editor.selection.open(key);
+      },
+      preview: (key, part, days) => {
+        const [window, entry] = [windowOf(key), byId.get(key)];
+        return window && entry
+          ? movedDays(windowDayNumbers(window), entry.content.offsets, part, days)
+          : NOWHERE;
+      },
+      label: (key, part) => {
+        const title = titleOf(byId.get(key));
+        return mayMove(key) ? t(`strip.move.${part}`, { title }) : t('strip:notYours', { title });
+      },
+      value: (key, part) => {
+        const window = windowOf(key);
+        if (window === null) return '';
+        if (part === 'all') return words.windowSentence(window);
+        return dates.day(part === 'start' ? window.earliest : window.lastAdvised);
+      },
+      say: ({ earliest, lastAdvised }) => dates.range(earliest, lastAdvised, 'short'),
+      onZoom,
+    };
+  }, [editor, onZoom, t, dates, words]);
+}
