@@ -1,3 +1,4 @@
+import { OPEN_PAGE_PATH } from '#shared/contracts/open-page.js';
 import compression from 'compression';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
@@ -36,6 +37,8 @@ import { CopyingService } from './features/imports/copying.service.js';
 import { FileImportService } from './features/imports/file-import.service.js';
 import { TableImportService } from './features/imports/table-import.service.js';
 import { importsRoutes } from './features/imports/imports.routes.js';
+import { openPageRoutes } from './features/open-page/open-page.routes.js';
+import { OpenPageService } from './features/open-page/open-page.service.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
 import { LetterPlannerService } from './features/letters/letter-planner.service.js';
 import { LetterRounds } from './features/letters/letter-rounds.service.js';
@@ -294,6 +297,7 @@ export function createApp(options: AppOptions): App {
     tables: new TableImportService(dataSource, clock, sky),
     copying: new CopyingService(dataSource, clock, sky, contents),
   });
+  openPageRoutes(router, mount, new OpenPageService(dataSource, clock, contents, config.publicUrl));
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);
@@ -364,6 +368,8 @@ function serveClient(app: Express, clientDir: string): void {
       return;
     }
     response.setHeader('Cache-Control', 'no-cache');
+    // What a village shows to whoever has the address is not for search engines.
+    if (request.path === OPEN_PAGE_PATH) response.setHeader('X-Robots-Tag', 'noindex, nofollow');
     response.sendFile(path.join(clientDir, 'index.html'));
   });
 }

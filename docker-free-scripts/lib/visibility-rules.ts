@@ -53,7 +53,7 @@ const VILLAGE: readonly Someone[] = [
   ...(['member of the group', 'giver', 'successor'] as const),
 ];
 
-/** What is open is open to people of the village: there are no pages for visitors yet. */
+/** What is open is for people of the village; the village's page for everybody has a rule of its own. */
 const CIRCLES: Readonly<Record<Level, readonly Someone[]>> = {
   open: VILLAGE,
   village: VILLAGE,

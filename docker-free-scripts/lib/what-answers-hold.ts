@@ -145,6 +145,8 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   exportCalendarJson: BOARD,
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
+  // For whoever has the address, of the village or not: what is open, and agreed to be handed on.
+  readOpenPage: { entry: (_person, thing) => thing.level === 'open' && isOnBoard(thing) },
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,
   readAttachment: TITLED_FILES,
@@ -202,6 +204,8 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   watchDraft: 'is ids and numbers of what the person sees',
   listVersions: 'counts what the person sees',
   listHelpable: 'names elders, and observers for keepers',
+  readOpenPageState: 'is a key and how much of the place is told',
+  drawOpenPageCode: 'is an address',
   listFeeds: 'is ids and days, of the person alone',
   listGroups: 'names groups and, to their people, members',
   listAskedSharing: 'is levels and ids',

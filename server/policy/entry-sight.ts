@@ -3,6 +3,7 @@ import {
   appearance,
   isForVillage,
   isKept,
+  isOpen,
   isOfItsPeople,
   maySee,
   type Appearance,
@@ -22,6 +23,8 @@ export interface EntrySight {
   appearance(thing: SeenThing): Appearance;
   /** On the village's board, in its counts and its sign-off. */
   isForVillage(thing: SeenThing): boolean;
+  /** For everybody, the village's own people or not. */
+  isOpen(thing: SeenThing): boolean;
   /** Answered by its own people. */
   isKept(thing: SeenThing): boolean;
   /** Kept, and the person is one of those who keep it and answer for it. */
@@ -45,6 +48,7 @@ export async function entrySight(
         .map((shared) => appearance(viewer, shared))
         .reduce(narrower),
     isForVillage: (thing) => both(thing).every((shared) => isForVillage(shared, viewer.today)),
+    isOpen: (thing) => both(thing).every((shared) => isOpen(shared, viewer.today)),
     isKept: (thing) => both(thing).some(standsApart),
     isOfItsPeople: (thing) =>
       both(thing).some(standsApart) &&

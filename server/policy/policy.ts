@@ -46,6 +46,11 @@ export function isForVillage(shared: Shared | undefined, today: string): boolean
   return level === 'open' || level === 'village';
 }
 
+/** For whoever comes by, of the village or not. */
+export function isOpen(shared: Shared | undefined, today: string): boolean {
+  return isForVillage(shared, today) && shared !== undefined && effectiveLevel(shared, today) === 'open';
+}
+
 /** Outside its telling season a thing is as if sealed. */
 export function effectiveLevel(
   { level, details }: Pick<Shared, 'level' | 'details'>,

@@ -18,6 +18,8 @@ export const AUDIT_ACTIONS = [
   'card-made',
   'card-ended',
   'card-first-used',
+  'open-page-on',
+  'open-page-off',
   'feed-made',
   'feed-ended',
   'letters-chosen',

@@ -25,6 +25,7 @@ import { privacyEndpoints } from './privacy.js';
 import { reviewsEndpoints } from './reviews.js';
 import { rolloversEndpoints } from './rollovers.js';
 import { sessionEndpoints } from './session.js';
+import { openPageEndpoints } from './open-page.js';
 import { importsEndpoints } from './imports.js';
 import { sharingEndpoints } from './sharing.js';
 import { sheetsEndpoints } from './sheets.js';
@@ -70,6 +71,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   sheetsEndpoints,
   exportsEndpoints,
   importsEndpoints,
+  openPageEndpoints,
   sharingEndpoints,
   notesEndpoints,
   withdrawalsEndpoints,

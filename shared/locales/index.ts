@@ -15,6 +15,7 @@ import { texts as finder } from './en/finder.js';
 import { texts as helping } from './en/helping.js';
 import { texts as moves } from './en/moves.js';
 import { texts as imports } from './en/imports.js';
+import { texts as open } from './en/open.js';
 import { texts as moons } from './en/moons.js';
 import { texts as letters } from './en/letters.js';
 import { texts as look } from './en/look.js';
@@ -62,6 +63,7 @@ export const en = {
   drift,
   exports,
   imports,
+  open,
   moons,
   moves,
   air,

@@ -18,6 +18,11 @@ export const doorRoutes: readonly AppRoute[] = [
   { path: PATTERNS.card, texts: ['cards', 'session'], load: () => import('./routes/card.js') },
   { path: PATTERNS.reset, texts: ['session', 'letters'], load: () => import('./routes/reset.js') },
   { path: PATTERNS.privacy, texts: ['privacy'], load: () => import('./routes/privacy.js') },
+  {
+    path: PATTERNS.openPage,
+    texts: ['open', 'calendars', 'sky'],
+    load: () => import('./routes/open.js'),
+  },
   { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
 ];
 
@@ -103,7 +108,18 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.version,
-    texts: ['versions', 'calendars', 'reviews', 'places', 'sky', 'notes', 'sharing', 'exports', 'moves'],
+    texts: [
+      'versions',
+      'calendars',
+      'reviews',
+      'places',
+      'sky',
+      'notes',
+      'sharing',
+      'exports',
+      'open',
+      'moves',
+    ],
     load: () => import('./routes/version.js'),
   },
   {

@@ -1,3 +1,4 @@
+import { OPEN_PAGE_PATH } from '#shared/contracts/open-page.js';
 import type { SharedItemType } from '#shared/contracts/sharing.js';
 
 /** Every address of the application, in one place. `pattern` is for the router, the rest for links. */
@@ -10,6 +11,8 @@ export const PATTERNS = {
   reset: '/reset',
   account: '/account',
   privacy: '/privacy',
+  /** A village's page for whoever has its address. */
+  openPage: OPEN_PAGE_PATH,
   stars: '/stars',
   moons: '/stars/moons',
   star: '/stars/:markerKey',
@@ -88,6 +91,7 @@ export const paths = {
   reset: () => PATTERNS.reset,
   account: () => PATTERNS.account,
   privacy: () => PATTERNS.privacy,
+  openPage: (page: string) => withQuery(PATTERNS.openPage, { page }),
   stars: (query: { placeId?: string; year?: number } = {}) => withQuery(PATTERNS.stars, query),
   moons: (query: { year?: number } = {}) => withQuery(PATTERNS.moons, query),
   star: (markerKey: string, query: { placeId?: string; year?: number } = {}) =>

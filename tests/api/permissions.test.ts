@@ -23,6 +23,7 @@ import {
   submit,
 } from '#tests/support/calendar-api.js';
 import { addConsent, asked } from '#tests/support/consent-api.js';
+import { switchOpenPageOn } from '#tests/support/open-page-api.js';
 import { addPicture } from '#tests/support/attachment-api.js';
 import { addSign, markSeen } from '#tests/support/sign-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
@@ -148,6 +149,7 @@ async function furnishOwn(): Promise<Village> {
     ...(await aSeenSign(village.officer, village.elder)),
     attachmentId: (await addPicture(village.elder, figureId)).id,
     feedKey: feed.key,
+    openKey: await switchOpenPageOn(clients.officer),
     withdrawalId: await aWithdrawal(village.officer.communityId),
     variantId,
     noteId: await aNote(village.officer, figureId),
@@ -179,6 +181,7 @@ async function furnishOther(): Promise<Village> {
     ...(await aSeenSign(officer, officer)),
     attachmentId: (await addPicture(officer, figureId)).id,
     feedKey: '',
+    openKey: '',
     withdrawalId: await aWithdrawal(home.community.id),
     variantId,
     noteId: await aNote(officer, figureId),

@@ -25,6 +25,7 @@ import {
 import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { copyTables, filesWith, putBack, tablesWith } from '#tests/support/search-everything.js';
+import { switchOpenPageOn } from '#tests/support/open-page-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
 import { furnishLevels } from '#tests/support/levelled-village.js';
 
@@ -49,6 +50,7 @@ describe('a withdrawn entry', () => {
   let published: Version;
   let everybody: Client[];
   let feedKey: string;
+  let openKey: string;
 
   beforeEach(async () => {
     await api.reset();
@@ -71,6 +73,7 @@ describe('a withdrawn entry', () => {
     published = await publish(village, version);
     const feeds = `/api/communities/${village.officer.communityId}/feeds`;
     feedKey = ((await village.elder.post(feeds).expect(201)).body as MadeFeed).key;
+    openKey = await switchOpenPageOn(village.officer);
     everybody = [
       ...Object.values(village).filter(isClient),
       await api.signIn('staff'),
@@ -82,7 +85,7 @@ describe('a withdrawn entry', () => {
   it('is found nowhere any more, in tables, files, answers, prints and records', async () => {
     const before = await placesWith(WORD);
     expect(before.length).toBeGreaterThan(8);
-    for (const file of ['calendar.ics', 'calendar.csv', 'feed.ics']) {
+    for (const file of ['calendar.ics', 'calendar.csv', 'calendar.json', 'feed.ics', 'open-page']) {
       expect(before.some((place) => place.includes(file))).toBe(true);
     }
     await withdraw(village.elder, 'entry', entry.id).expect(204);
@@ -211,6 +214,7 @@ describe('a withdrawn entry', () => {
         compareVersions: ['?from=1&to=draft'],
         readLongLook: ['?from=2027&years=1&number=1', '?from=2027&years=1&number=draft'],
         readFeed: [`?key=${feedKey}`],
+        readOpenPage: [`?key=${openKey}`],
         listAttachments: [`?subjectType=entry&subjectId=${entry.id}`],
         listAuditEvents: ['?limit=200'],
         printSheet: ['?layout=month-cards'],

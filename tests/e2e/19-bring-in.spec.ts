@@ -7,7 +7,7 @@ import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support
  * The officer brings last year's spreadsheet in on a phone: a column is matched by hand, a line is put right, the network
  * goes in the middle, and nothing comes twice. Then a calendar that was taken along whole comes back.
  */
-test.use({ viewport: { width: 320, height: 740 }, hasTouch: true, expectedNoise: [/ERR_FAILED|409/u] });
+test.use({ viewport: { width: 320, height: 740 }, hasTouch: true, expectedNoise: [/ERR_FAILED|404|409/u] });
 
 test('the officer brings a table in, line by line looked at, and a calendar’s own file', async ({ page }) => {
   await signIn(page, 'officer');
@@ -74,4 +74,43 @@ test('the officer brings a table in, line by line looked at, and a calendar’s 
   await expectNoSidewaysScroll(page);
   await bring.getByRole('button', { name: /^Bring \d+ entries in$/u }).click();
   await expect(bring.getByText(/^\d+ entries were brought in/u)).toBeVisible();
+});
+
+test('the officer opens a page for everybody, a passer-by reads it, and it is closed again', async ({
+  page,
+  browser,
+}) => {
+  await signIn(page, 'officer');
+  const { items } = (await (await page.request.get('/api/calendars')).json()) as { items: Calendar[] };
+  const calendar = items.find(({ published }) => published !== null);
+  await page.goto(`/calendars/${calendar?.id ?? ''}/versions/${String(calendar?.published?.number)}`);
+  const board = page.getByRole('region', { name: 'A page for everybody' });
+  await expect(board.getByText('It is off.')).toBeVisible();
+  await board
+    .getByLabel('How much of the place it tells')
+    .selectOption({ label: 'Its name, to a whole degree (about 110 km)' });
+  await board.getByRole('button', { name: 'Switch it on' }).click();
+  const address = await board.locator('code').innerText();
+  await expect(board.getByRole('img', { name: 'The address as a picture' })).toBeVisible();
+  await expectAccessible(page);
+  await expectNoSidewaysScroll(page);
+
+  const passing = await browser.newContext({ viewport: { width: 320, height: 740 } });
+  const passerBy = await passing.newPage();
+  const opened = await passerBy.goto(new URL(address).pathname + new URL(address).search);
+  expect(opened?.headers()['x-robots-tag']).toBe('noindex, nofollow');
+  await expect(passerBy.getByRole('heading', { level: 1, name: /^The year’s work of/u })).toBeVisible();
+  await expect(passerBy.getByText('Never look at the Sun', { exact: false })).toBeVisible();
+  await expect(passerBy.getByRole('heading', { level: 3 }).first()).toBeVisible();
+  await expect(passerBy.getByText(/about \d+° north/u)).toBeVisible();
+  await expect(passerBy.getByText(/Elder A-|Officer A/u)).toHaveCount(0);
+  await expectAccessible(passerBy);
+  await expectNoSidewaysScroll(passerBy);
+
+  await board.getByRole('button', { name: 'Switch it off' }).click();
+  await page.getByRole('button', { name: 'Switch it off now' }).click();
+  await expect(board.getByText('It is off.')).toBeVisible();
+  await passerBy.reload();
+  await expect(passerBy.getByText('There is no such page')).toBeVisible();
+  await passing.close();
 });

@@ -32,6 +32,7 @@ export interface Village {
   attachmentId: string;
   groupId: string;
   feedKey: string;
+  openKey: string;
   variantId: string;
   /** A note of somebody who calls nothing here. */
   noteId: string;
@@ -88,10 +89,14 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
   };
 }
 
-export function queryOf(endpoint: Endpoint, { publishedNumber, figureId, feedKey }: Village): string {
+export function queryOf(
+  endpoint: Endpoint,
+  { publishedNumber, figureId, feedKey, openKey }: Village,
+): string {
   const queries: Record<string, string> = {
     findTimeZone: '?latitudeDeg=12&longitudeDeg=39',
     readFeed: `?key=${feedKey}`,
+    readOpenPage: `?key=${openKey}`,
     listStars: '?year=2027',
     exportStarsCsv: '?year=2027',
     readStar: '?year=2027',
@@ -181,6 +186,7 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     }),
     // To itself, which is refused once somebody may copy at all.
     copyCalendar: () => ({ key: randomUUID(), dryRun: true, toCalendarId: village.calendarId }),
+    switchOpenPageOn: () => ({ placeShown: 'name' }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),
     addNote: () => noteInput({ subjectType: 'figure', subjectId: village.figureId }),

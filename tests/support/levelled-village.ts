@@ -29,6 +29,7 @@ import {
 } from './levelled-things.js';
 import { addRecording } from './attachment-api.js';
 import { addNote } from './notes-api.js';
+import { switchOpenPageOn } from './open-page-api.js';
 import { addGroup } from './sharing-api.js';
 
 /** Remembers what a word stands for; makes one where none is given. */
@@ -151,6 +152,7 @@ export async function furnishLevels(
   const consentIds = await settleConsents(elder, entries, figures, plant);
   const feed = (await village.observer.post(`/api/communities/${officer.communityId}/feeds`).expect(201))
     .body as MadeFeed;
+  const openKey = await switchOpenPageOn(officer);
   const rolled = await officer.post(`/api/calendars/${calendar.id}/next-year`).expect(200);
   const rolledId = (rolled.body as RolledCalendar).calendarId;
   const askedFigures = figures.filter(isAskedFigure);
@@ -213,6 +215,7 @@ export async function furnishLevels(
       listSkyMarkers: ['?year=2027'],
       readStarAir: ['?year=2027'],
       readFeed: [`?key=${feed.key}`],
+      readOpenPage: [`?key=${openKey}`],
       readMoons: moonsBy(askedFigures),
       exportMoonsCsv: moonsBy(askedFigures),
       findMarkers: ['?year=2027&from=06-10'],

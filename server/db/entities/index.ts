@@ -25,6 +25,7 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
+import { OpenPageEntity } from './open-page.entity.js';
 import { CalendarImportEntity } from './calendar-import.entity.js';
 import { RolledItemEntity } from './rolled-item.entity.js';
 import { RolloverEntity } from './rollover.entity.js';
@@ -86,5 +87,6 @@ export const ENTITIES = [
   RolloverEntity,
   RolledItemEntity,
   CalendarImportEntity,
+  OpenPageEntity,
   WriteKeyEntity,
 ];

@@ -19,6 +19,7 @@ import { PeopleWithoutAddress1798510000000 } from './1798510000000-people-withou
 import { CalendarFeeds1798600000000 } from './1798600000000-calendar-feeds.js';
 import { Rollovers1798800000000 } from './1798800000000-rollovers.js';
 import { CalendarImports1798900000000 } from './1798900000000-calendar-imports.js';
+import { OpenPages1798910000000 } from './1798910000000-open-pages.js';
 import { Signs1799000000000 } from './1799000000000-signs.js';
 import { Weather1799000100000 } from './1799000100000-weather.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
@@ -48,6 +49,7 @@ export const MIGRATIONS = [
   CalendarFeeds1798600000000,
   Rollovers1798800000000,
   CalendarImports1798900000000,
+  OpenPages1798910000000,
   Signs1799000000000,
   Weather1799000100000,
   RolloverGrounds1799100000000,

@@ -45,6 +45,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   actual_date: row('knowledge', ['typed_by'], ['entry_id', 'first_day', 'last_day', 'typed_at']),
   entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
   rollover: row('knowledge', ['rolled_by'], ['calendar_id', 'rolled_at']),
+  open_page: row('knowledge', ['switched_by'], ['community_id', 'switched_on_at'], ['page_key']),
   calendar_import: row('knowledge', ['brought_by'], ['calendar_id', 'brought_at', 'added']),
   rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),

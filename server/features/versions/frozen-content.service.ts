@@ -22,7 +22,8 @@ import { draftVariants } from '../variants/draft-variants.service.js';
 import { readDraft } from '../calendars/draft.service.js';
 import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { entriesForUse } from '../../policy/consent-gate.js';
-import { viewerOf } from '../../policy/viewer.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { checkSeal, leavesOf, newSalt } from './seal.service.js';
 import {
   contentsOf,
@@ -30,6 +31,7 @@ import {
   entriesForVillage,
   seenOfDraft,
   seenOfVersion,
+  thingOf,
 } from './seen-content.service.js';
 import { toHeader, toVersionEntry, toVersionVariant } from './versions.mapper.js';
 import { findVersion, frozenEntries, frozenVariants } from './versions.repository.js';
@@ -96,6 +98,21 @@ export class FrozenContentService {
     const shown = await entriesForVillage(manager, viewer, content.entries);
     const entries = await entriesForUse(manager, viewer.today, use, shown);
     return { ...content, header: cutHeader(content.header, entries).header, entries };
+  }
+
+  /** What is open to whoever comes by, and may be handed on: nobody of the village has to ask for it. */
+  async readForEverybody(communityId: string, version: CalendarVersionEntity): Promise<CalendarContent> {
+    const { manager } = this.dataSource;
+    const today = await villageDay(manager, communityId, this.clock.now());
+    const passerBy = { personId: '', communityId, roles: [], groupIds: new Set<string>(), today };
+    const frozen = await frozenContent(manager, version);
+    const seen = await seenOfVersion(manager, passerBy, version, frozen.header, frozen.entries);
+    const shown = await entriesForVillage(manager, passerBy, seen.entries.map(bodyOf));
+    const sight = await entrySight(manager, passerBy, shown.map(thingOf));
+    const open = shown.filter((entry) => sight.isOpen(thingOf(entry)));
+    const entries = await entriesForUse(manager, today, 'feed', open);
+    const { number, label, state, hash } = version;
+    return { header: cutHeader(seen.header, entries).header, entries, number, label, state, hash };
   }
 
   private async draft(manager: EntityManager, actor: Actor, calendarId: string): Promise<CalendarContent> {

@@ -24,6 +24,9 @@ export const texts = {
     'card-made': '{{actor}} made a sign-in card for {{subject}}.',
     'card-ended': 'The sign-in card of {{subject}} ended: {{why}}.',
     'card-first-used': '{{subject}} used their sign-in card for the first time.',
+    'open-page-on':
+      '{{actor}} switched the page for everybody on, or changed how much of the place it tells.',
+    'open-page-off': '{{actor}} switched the page for everybody off.',
     'feed-made': '{{actor}} made an address for the calendar of a telephone.',
     'feed-ended': '{{actor}} ended an address for the calendar of a telephone.',
     'letters-chosen': '{{actor}} chose how to be asked.',

@@ -1,6 +1,7 @@
 import { AboutEntryButton } from '#src/app/items/about-entry.js';
 import { FeedsBoard } from '#src/features/exports/components/feeds-board.js';
 import { TakeAlongBoard } from '#src/features/exports/components/take-along-board.js';
+import { OpenPageBoard } from '#src/features/open-page/components/open-page-board.js';
 import { ReviewBoard } from '#src/features/reviews/components/review-board.js';
 import { VersionPage } from '#src/features/versions/components/version-page.js';
 
@@ -13,6 +14,7 @@ export function Component() {
         <>
           <TakeAlongBoard calendarId={calendarId} number={number} isPublished={state === 'published'} />
           {state === 'published' && <FeedsBoard communityId={communityId} />}
+          {state === 'published' && <OpenPageBoard communityId={communityId} />}
         </>
       )}
     />

@@ -1,0 +1,25 @@
+import { openPageEndpoints } from '#shared/contracts/open-page.js';
+import type { Router } from 'express';
+import { FileReply } from '../../http/file-reply.js';
+import { feedLimits } from '../../http/limits.js';
+import type { Mount } from '../../http/mount.js';
+import type { OpenPageService } from './open-page.service.js';
+
+export function openPageRoutes(router: Router, mount: Mount, pages: OpenPageService): void {
+  router.get(openPageEndpoints.read.path, ...feedLimits(), (_request, response, next) => {
+    response.setHeader('X-Robots-Tag', 'noindex, nofollow');
+    next();
+  });
+
+  mount.forMember(openPageEndpoints.state, (_call, actor) => pages.state(actor));
+  mount.forMember(openPageEndpoints.switchOn, ({ body }, actor) => pages.switchOn(actor, body.placeShown));
+  mount.forMember(openPageEndpoints.switchOff, async (_call, actor) => {
+    await pages.switchOff(actor);
+    return undefined;
+  });
+  mount.forMember(
+    openPageEndpoints.code,
+    async (_call, actor) => new FileReply(await pages.code(actor), 'open-page.svg', 'inline'),
+  );
+  mount.forAnybody(openPageEndpoints.read, ({ query }) => pages.read(query.key));
+}

@@ -1,0 +1,105 @@
+import { z } from 'zod';
+import { entryIcon, entryKind, entryWindow } from './calendars.js';
+import { id, instant } from './common.js';
+import { defineEndpoint, member, anybody } from './endpoint.js';
+import { markerKey, markerNames, phenomenon } from './stars.js';
+
+/** How much of the place the page tells, from nothing to its name with a tenth of a degree (about eleven kilometres). */
+export const PLACES_SHOWN = ['nothing', 'name', 'degree', 'tenth'] as const;
+export const placeShown = z.enum(PLACES_SHOWN);
+export type PlaceShown = (typeof PLACES_SHOWN)[number];
+
+/** The village's page for everybody; off while there is no key. */
+export const openPageState = z.strictObject({
+  key: z.string().nullable(),
+  placeShown,
+  switchedOnAt: instant.nullable(),
+});
+export type OpenPageState = z.infer<typeof openPageState>;
+
+/** One entry for everybody: what, when and by which star; no person, no office, no source. */
+const openEntry = z.strictObject({
+  entryId: id,
+  titleVillage: z.string(),
+  titleOfficer: z.string(),
+  kind: entryKind,
+  icon: entryIcon,
+  crop: z.string(),
+  otherSigns: z.string(),
+  ifLate: z.string(),
+  caution: z.string(),
+  protectiveWatch: z.boolean(),
+  window: entryWindow.nullable(),
+  /** The star that it goes by; null for everything else. */
+  star: z.strictObject({ markerKey, phenomenon }).nullable(),
+});
+export type OpenEntry = z.infer<typeof openEntry>;
+
+export const openPage = z.strictObject({
+  communityName: z.string(),
+  placeName: z.string().nullable(),
+  /** Rounded as the village chose. */
+  place: z
+    .strictObject({ latitudeDeg: z.number(), longitudeDeg: z.number(), roundedToDeg: z.number() })
+    .nullable(),
+  /** Null while nothing is published. */
+  version: z.strictObject({ year: z.number().int(), label: z.string(), publishedAt: instant }).nullable(),
+  markers: z.array(markerNames),
+  entries: z.array(openEntry),
+});
+export type OpenPage = z.infer<typeof openPage>;
+
+const params = z.strictObject({ communityId: id });
+const keepers = member('community', 'officer', 'steward');
+
+export const openPageEndpoints = {
+  state: defineEndpoint({
+    id: 'readOpenPageState',
+    method: 'GET',
+    path: '/api/communities/:communityId/open-page',
+    summary: 'Whether the village has a page for everybody, and its key',
+    access: keepers,
+    params,
+    response: openPageState,
+  }),
+  code: defineEndpoint({
+    id: 'drawOpenPageCode',
+    method: 'GET',
+    path: '/api/communities/:communityId/open-page/code.svg',
+    summary: 'The address of the page as a QR code, to print',
+    access: keepers,
+    params,
+    fileType: 'image/svg+xml',
+  }),
+  read: defineEndpoint({
+    id: 'readOpenPage',
+    method: 'GET',
+    // The key stands in the query, because paths are written into logs.
+    path: '/api/open-page',
+    summary: 'The open entries of what the village published last, for whoever has the address',
+    access: anybody,
+    query: z.strictObject({ key: z.string().max(200) }),
+    response: openPage,
+  }),
+  switchOn: defineEndpoint({
+    id: 'switchOpenPageOn',
+    method: 'PUT',
+    path: '/api/communities/:communityId/open-page',
+    summary: 'Switch the page for everybody on, or say how much of the place it tells; its address stays',
+    access: keepers,
+    params,
+    body: z.strictObject({ placeShown }),
+    response: openPageState,
+  }),
+  switchOff: defineEndpoint({
+    id: 'switchOpenPageOff',
+    method: 'DELETE',
+    path: '/api/communities/:communityId/open-page',
+    summary: 'Switch the page for everybody off; its address is never used again',
+    access: keepers,
+    params,
+  }),
+} as const;
+
+/** The page that a telephone opens; the key stands behind it in the query. */
+export const OPEN_PAGE_PATH = '/open';

@@ -1,0 +1,48 @@
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { openPageEndpoints, type PlaceShown } from '#shared/contracts/open-page.js';
+import { apiUrl, callApi } from '#src/lib/api-client.js';
+import { paths } from '#src/lib/paths.js';
+
+export function openPageQuery(key: string) {
+  return queryOptions({
+    queryKey: ['open-page', key],
+    queryFn: ({ signal }) => callApi(openPageEndpoints.read, { query: { key }, signal }),
+  });
+}
+
+export function openPageStateQuery(communityId: string) {
+  return queryOptions({
+    queryKey: ['open-page-state', communityId],
+    queryFn: ({ signal }) => callApi(openPageEndpoints.state, { params: { communityId }, signal }),
+  });
+}
+
+export function useSwitchOn(communityId: string) {
+  return useMutation({
+    mutationFn: (placeShown: PlaceShown) =>
+      callApi(openPageEndpoints.switchOn, { params: { communityId }, body: { placeShown } }),
+    onSettled: useRefresh(communityId),
+  });
+}
+
+export function useSwitchOff(communityId: string) {
+  return useMutation({
+    mutationFn: () => callApi(openPageEndpoints.switchOff, { params: { communityId } }),
+    onSettled: useRefresh(communityId),
+  });
+}
+
+function useRefresh(communityId: string) {
+  const client = useQueryClient();
+  return () => client.invalidateQueries({ queryKey: openPageStateQuery(communityId).queryKey });
+}
+
+/** The whole address, for people and for paper. */
+export function openPageAddress(key: string): string {
+  return new URL(paths.openPage(key), window.location.origin).href;
+}
+
+/** The picture of it; another one for another address. */
+export function openPageCodeUrl(communityId: string, key: string): string {
+  return `${apiUrl(openPageEndpoints.code, { params: { communityId } })}?of=${encodeURIComponent(key.slice(0, 8))}`;
+}
