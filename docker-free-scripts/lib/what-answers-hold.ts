@@ -142,7 +142,8 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   // Who says yes here says it to every use, so files to take along hold what the board holds.
   exportCalendarIcs: BOARD,
   exportCalendarCsv: BOARD,
-  exportCalendarJson: BOARD,
+  // Whole: other timings stand beside their entries, as far as the board may go by them.
+  exportCalendarJson: { ...BOARD, variant: both(sees, onBoard) },
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.
