@@ -69,9 +69,14 @@ export type Place = z.infer<typeof place>;
 
 export const timeZoneAnswer = z.strictObject({ timeZone: z.string().nullable() });
 
+/** Zones that were found to be known; making a clock for each place in every answer would take longer than the rest. */
+const knownZones = new Set<string>();
+
 function isTimeZone(name: string): boolean {
+  if (knownZones.has(name)) return true;
   try {
     new Intl.DateTimeFormat('en', { timeZone: name });
+    if (name.length > 0) knownZones.add(name);
     return name.length > 0;
   } catch {
     return false;
