@@ -71,12 +71,13 @@ export const timeZoneAnswer = z.strictObject({ timeZone: z.string().nullable() }
 
 /** Zones that were found to be known; making a clock for each place in every answer would take longer than the rest. */
 const knownZones = new Set<string>();
+const ZONES_MAX = 1000;
 
 function isTimeZone(name: string): boolean {
   if (knownZones.has(name)) return true;
   try {
     new Intl.DateTimeFormat('en', { timeZone: name });
-    if (name.length > 0) knownZones.add(name);
+    if (name.length > 0 && knownZones.size < ZONES_MAX) knownZones.add(name);
     return name.length > 0;
   } catch {
     return false;
