@@ -1,9 +1,11 @@
 // npm run bench:large            a table for people
 // npm run bench:large -- --json  one JSON line
+import { chromium } from '@playwright/test';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openClient, signInAs, type Client } from '#tests/support/api.js';
 import { entryInput, submit, takeBack } from '#tests/support/calendar-api.js';
+import playwrightConfig from '../../playwright.config.js';
 import { onBuiltProduct } from './built-product.js';
 
 /** As much as a calendar may hold, and as many submissions as a busy office makes of it. */
@@ -25,7 +27,42 @@ async function measure(address: string): Promise<Record<string, number>> {
     versionMs: await middleMs(officer, `${path}/versions/${last.number}`),
     comparisonMs: await middleMs(officer, `${path}/comparison?from=1&to=${last.number}`),
     longLookMs: await middleMs(officer, `${path}/long-look?from=2029&number=draft`),
+    ...(await measurePages(address, officer, calendar.id, last)),
   };
+}
+
+/** From opening an address until its entries are there, as many as it draws at first; code and texts are in the cache. */
+async function measurePages(
+  address: string,
+  officer: Client,
+  calendarId: string,
+  { number }: Version,
+): Promise<Record<string, number>> {
+  const browser = await chromium.launch(playwrightConfig.use?.launchOptions ?? {});
+  try {
+    const context = await browser.newContext({ viewport: { width: 360, height: 740 } });
+    const [name = '', ...value] = (officer.cookie.split(';')[0] ?? '').split('=');
+    await context.addCookies([{ name, value: value.join('='), url: address }]);
+    const page = await context.newPage();
+    const opened = async (path: string, last: number) => {
+      const times: number[] = [];
+      for (let time = 0; time < 4; time += 1) {
+        const start = performance.now();
+        await page.goto(`${address}${path}`);
+        await page.getByRole('main').getByText(`Work ${last}`).first().waitFor({ state: 'attached' });
+        times.push(performance.now() - start);
+      }
+      return Math.round(times.slice(1).toSorted((a, b) => a - b)[1] ?? Number.NaN);
+    };
+    const of = `/calendars/${calendarId}`;
+    return {
+      draftPageMs: await opened(of, ENTRIES),
+      versionPageMs: await opened(`${of}/versions/${number}`, 40),
+      longLookPageMs: await opened(`${of}/long-look?number=draft`, 40),
+    };
+  } finally {
+    await browser.close();
+  }
 }
 
 /** Every month its own fixed date and stars in between, so that no two entries are alike. */

@@ -22,6 +22,8 @@ export const texts = {
   cancel: 'Leave it as it is',
   save: 'Save',
   back: 'Back',
+  moreOfThem_one: 'Show {{count}} more',
+  moreOfThem_other: 'Show more of the other {{count}}',
   tryAgain: 'Try again',
   stop: 'Stop',
   show: 'Show',

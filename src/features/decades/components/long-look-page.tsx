@@ -9,6 +9,7 @@ import { versionNumber } from '#shared/contracts/versions.js';
 import { calendarQuery } from '#src/lib/calendar-queries.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
+import { MoreOfThem, useShownPart } from '#src/lib/shown-part.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button, ButtonLink } from '#src/ui/button.js';
 import { Mast, Page } from '#src/ui/page.js';
@@ -96,6 +97,7 @@ function Looked({ look }: { look: LongLook }) {
   const { t } = useTranslation('decades');
   const [view, setView] = useState<'pictures' | 'table'>('pictures');
   const { label, number, entries } = look;
+  const { shown, left, more } = useShownPart(entries);
   if (entries.length === 0) {
     return (
       <Board>
@@ -120,14 +122,15 @@ function Looked({ look }: { look: LongLook }) {
         ]}
       />
       {view === 'table' ? (
-        <YearsTable look={look} />
+        <YearsTable look={look} entries={shown} />
       ) : (
         <div className="multiples">
-          {entries.map((entry) => (
+          {shown.map((entry) => (
             <YearMultiples key={entry.entryId} entry={entry} villageLanguageTag={look.villageLanguageTag} />
           ))}
         </div>
       )}
+      <MoreOfThem left={left} more={more} />
     </>
   );
 }

@@ -1,11 +1,11 @@
 import { useTranslation } from 'react-i18next';
-import type { LongLook } from '#shared/contracts/decades.js';
+import type { LongLook, LookedEntry } from '#shared/contracts/decades.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { Table } from '#src/ui/table.js';
 
 /** The same days in words: a row for each entry, a column for each year. */
-export function YearsTable({ look }: { look: LongLook }) {
+export function YearsTable({ look, entries }: { look: LongLook; entries: readonly LookedEntry[] }) {
   const { t } = useTranslation('decades');
   const words = useEntryWords();
   const dates = useDateWords();
@@ -23,7 +23,7 @@ export function YearsTable({ look }: { look: LongLook }) {
         </tr>
       </thead>
       <tbody>
-        {look.entries.map((entry) => (
+        {entries.map((entry) => (
           <tr key={entry.entryId}>
             <th scope="row">{entry.titleOfficer}</th>
             {entry.years.map(({ year, window }) => (

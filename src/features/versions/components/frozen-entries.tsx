@@ -9,6 +9,7 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryFacts, type FactGroup } from '#src/lib/entry-facts.js';
 import { useEntryWords, windowDayNumbers, type NamesByKey } from '#src/lib/entry-words.js';
 import { SignsInLine } from '#src/lib/signs-in-line.js';
+import { MoreOfThem, useShownPart } from '#src/lib/shown-part.js';
 import { VariantList } from '#src/lib/variant-list.js';
 import { KeptLine } from '#src/lib/kept-line.js';
 import { KeptChip } from '#src/lib/level-chip.js';
@@ -27,12 +28,13 @@ interface FrozenEntriesProps {
 export function FrozenEntries({ version, about }: FrozenEntriesProps) {
   const { t } = useTranslation('versions');
   const { header, entries } = version;
+  const { shown, left, more } = useShownPart(entries);
   const markers: NamesByKey = new Map(header.markers.map((marker) => [marker.markerKey, marker]));
   return (
     <Board title={t('page.entries')}>
       <p className="text-small text-umber-soft">{t('page.entriesHint')}</p>
       <ol className="frozen-entries">
-        {entries.map((entry) => (
+        {shown.map((entry) => (
           <li key={entry.entryId}>
             <FrozenEntry
               entry={entry}
@@ -44,6 +46,7 @@ export function FrozenEntries({ version, about }: FrozenEntriesProps) {
           </li>
         ))}
       </ol>
+      <MoreOfThem left={left} more={more} />
       <KeptLine keptCount={version.keptCount} withdrawnCount={version.withdrawnCount} />
     </Board>
   );
