@@ -27,7 +27,6 @@ export const texts = {
   howToMove:
     'Drag a bar, or one of its ends. With keys: up and down go from bar to bar, left and right move by a day, with Shift by ten, Enter opens.',
   notYours: '{{title}}, kept by somebody else',
-  edit: 'Change in the table',
   column: {
     earliestDays: 'Days to earliest',
     bestFromDays: 'Days to best from',
