@@ -3,20 +3,10 @@ import type { EntryWindow } from './entry-model.js';
 import { bestDaysWithin } from './overlap.js';
 import { rainClashOf } from './rain-clash.js';
 
-/**
+/*
  * What an officer may want to look at before elders are asked, beside what the days of an entry say of themselves. None
  * of it is frozen: it rests on other entries, on the place and on what is known today.
  */
-export const ADVICE = [
-  'same-people',
-  'crop-not-ripe',
-  'crop-long-ripe',
-  'cloudy-season',
-  'moonlit',
-  'drifted',
-  'no-safety-line',
-] as const;
-export type Advice = (typeof ADVICE)[number];
 
 /** An entry as far as it is looked at here. */
 export interface AdvisedEntry {
