@@ -5,6 +5,7 @@
 export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/contracts/consents.ts': 'tests/api/consents.test.ts',
   'shared/contracts/sharing.ts': 'tests/api/sharing.test.ts',
+  'shared/calendar/day-grounds.ts': 'tests/unit/shared/calendar/why-moved.test.ts',
   'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sheet/day-row.ts': 'tests/unit/shared/sheet/month-card.test.ts',
