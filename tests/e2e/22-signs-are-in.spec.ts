@@ -31,10 +31,11 @@ test('an officer lets an entry wait for two signs of the village’s list', asyn
   await page.getByRole('link', { name: 'Open the draft' }).first().click();
   await page.getByRole('button', { name: 'Add an entry' }).click();
   await page.getByLabel(/^Name of the work or rite/).fill(ENTRY);
-  await page.getByRole('radio', { name: /^A fixed date/ }).check();
-  await page.getByLabel('Month').first().selectOption('March');
-  await page.getByLabel('Day', { exact: true }).first().selectOption('20');
-  await page.getByLabel('Who set it, and where it is written').first().fill('the village');
+  const when = page.locator('[data-group="when"]');
+  await when.getByRole('radio', { name: /^A fixed date/ }).check();
+  await when.getByLabel('Month').first().selectOption('March');
+  await when.getByLabel('Day', { exact: true }).first().selectOption('20');
+  await when.getByLabel('Who set it, and where it is written').first().fill('the village');
   const signs = page.locator('[data-group="signs"]');
   await signs.locator('summary').first().click();
   await signs.getByText('More for the elders and the field').click();
