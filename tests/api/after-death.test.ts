@@ -104,14 +104,14 @@ describe('what was chosen for after a death', () => {
     const passed = await given({ afterDeath: 'pass-to', passTo: 'My niece' });
     const heir = (personId: string, name = 'My niece') =>
       village.steward.post(`${path()}/heirs`, { name, personId });
-    expect((await heir(village.elder3.personId)).status).toBe(404);
+    expect(reasonOf(await heir(village.elder3.personId))).toBe('409 nothing-to-pass');
     expect((await note().expect(200)).body).toMatchObject({ openHeirs: ['My niece'] });
     expect(await sharingOf(passed)).toMatchObject({ giverId: village.elder.personId });
     const waits = async () =>
       ((await village.steward.get(`/api/communities/${village.steward.communityId}/today`)).body as Today)
         .heirsOpen;
     expect(await waits()).toBe(1);
-    expect((await heir(village.elder3.personId, 'My nephew')).status).toBe(404);
+    expect(reasonOf(await heir(village.elder3.personId, 'My nephew'))).toBe('409 nothing-to-pass');
     expect((await heir(village.elder.personId)).status).toBe(422);
     expect((await heir((await api.signIn('officer2')).personId)).status).toBe(422);
     expect((await heir(village.elder3.personId).expect(200)).body).toMatchObject({ openHeirs: [] });

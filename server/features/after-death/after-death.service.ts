@@ -71,7 +71,7 @@ export class AfterDeathService {
       await expectOfVillage(manager, actor, personId, { mode: 'pessimistic_write' });
       const death = await manager.findOneBy(DeathEntity, { personId, communityId });
       const waiting = (await waitingHeirs(manager, actor, personId)).filter(({ passTo }) => passTo === name);
-      if (death === null || waiting.length === 0) throw notFound();
+      if (death === null || waiting.length === 0) throw conflict('nothing-to-pass');
       const isMember = await manager.existsBy(MembershipEntity, { communityId, personId: heirId });
       if (!isMember || heirId === personId) throw invalidField('personId', 'not-of-this-village');
       for (const { row } of waiting) {

@@ -105,6 +105,7 @@ export const texts = {
     'part-differs': 'This part has come already with another content. Begin a new recording.',
     'part-missing': 'The part before this one has not come yet. Send that one first.',
     'too-many-attachments': 'At most 60 recordings and pictures belong to one thing. Remove one first.',
+    'nothing-to-pass': 'Nothing waits to be passed on under this name.',
     'death-noted': 'This is noted already.',
     'removes-for-good': 'They chose that something is removed. Say once more that it will be gone for good.',
     'removed-for-good': 'Something was removed for good, as they chose. That cannot be undone.',
