@@ -147,7 +147,9 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.
-  readOpenPage: { entry: (_person, thing) => thing.level === 'open' && isOnBoard(thing) },
+  readOpenPage: {
+    entry: (_person, thing) => thing.level === 'open' && thing.consent === 'yes' && isOnBoard(thing),
+  },
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,
   readAttachment: TITLED_FILES,

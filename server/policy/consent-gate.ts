@@ -15,6 +15,8 @@ export async function entriesForUse<B extends VersionEntryBody>(
   today: string,
   use: ConsentUse,
   entries: readonly B[],
+  /** What leaves the village is carried only where somebody was asked and said yes. */
+  leavesVillage = false,
 ): Promise<B[]> {
   const consentsOf = await consentsById(
     manager,
@@ -30,7 +32,9 @@ export async function entriesForUse<B extends VersionEntryBody>(
   return entries.filter((entry) => {
     const figureId = figureOf(entry);
     if (figureId !== null && !mayUse(figureConsentsOf(figureId), use, null, today)) return false;
-    return mayUse(consentsOf(entry.entryId), use, entry.content.kind, today);
+    const consents = consentsOf(entry.entryId);
+    if (leavesVillage && consents.length === 0) return false;
+    return mayUse(consents, use, entry.content.kind, today);
   });
 }
 

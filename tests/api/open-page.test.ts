@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
+import { CONSENT_USES } from '#shared/contracts/consents.js';
 import type { OpenPage, OpenPageState } from '#shared/contracts/open-page.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
@@ -35,6 +36,8 @@ beforeAll(async () => {
     ...{ hasLastDate: true, lastDate: { date: { month: 7, day: 3 }, source: `Office of ${NAME}` } },
   });
   openId = open.id;
+  await addConsent(officer, 'entry', open.id, { uses: [...CONSENT_USES] });
+  await addEntry(officer, calendarId, { titleOfficer: 'Nobody was asked', sharingLevel: 'open' });
   await addEntry(officer, calendarId, { titleOfficer: 'The village’s', sharingLevel: 'village' });
   await addEntry(elder, calendarId, { titleOfficer: 'Of the elders', sharingLevel: 'elders' });
   const figure = await addFigure(officer, { names: [{ tag: 'en', name: 'Our own bowl' }] });

@@ -1,9 +1,7 @@
 import type { ActualDays } from '#shared/contracts/actual-days.js';
 import type { Calendar, Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
-import type { PlaceSnapshot } from '#shared/contracts/stars.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import type { EntryEntity } from '../../db/entities/entry.entity.js';
-import type { PlaceEntity } from '../../db/entities/place.entity.js';
 import type { PublishedFacts } from './calendars.repository.js';
 
 export interface CalendarFacts {
@@ -66,21 +64,5 @@ export function toEntry(facts: EntryFacts): Entry {
     updatedAt: row.updatedAt.toISOString(),
     mine,
     ...(actual && { actual }),
-  };
-}
-
-export function toPlaceSnapshot(row: PlaceEntity): PlaceSnapshot {
-  return {
-    name: row.name,
-    latitudeDeg: row.latitudeDeg,
-    longitudeDeg: row.longitudeDeg,
-    elevationM: row.elevationM,
-    timeZone: row.timeZone,
-    skyline: row.skyline,
-    clarityByMonth: row.clarityByMonth,
-    thresholdSet: row.thresholdSet,
-    sameSideShiftDeg: row.sameSideShiftDeg,
-    oppositeSideShiftDeg: row.oppositeSideShiftDeg,
-    skylineRule: row.skylineRule,
   };
 }

@@ -15,3 +15,13 @@ export async function orderAmongOthers(
     ids.map((id) => (movable.has(id) ? (next.shift() ?? id) : id)),
   );
 }
+
+/** Where new entries stand behind those that are there; `takeIt` writes that down once they are in. */
+export async function roomAtTheEnd(
+  manager: EntityManager,
+  calendarId: string,
+  newIds: readonly string[],
+): Promise<{ first: number; takeIt: () => Promise<void> }> {
+  const before = (await liveEntries(manager, calendarId)).map(({ id }) => id);
+  return { first: before.length, takeIt: () => writeOrder(manager, [...before, ...newIds]) };
+}

@@ -7,7 +7,7 @@ import type { EntryEntity } from '../../db/entities/entry.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { AppError, notFound } from '../../http/app-error.js';
 import { everyVillageFigure } from '../figures/village-figures.service.js';
-import { toPlaceSnapshot } from './calendars.mapper.js';
+import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
 import { liveEntries } from './calendars.repository.js';
 import { withAnchors } from './anchored-draft.service.js';
 import type { SkyDatesService } from './sky-dates.service.js';

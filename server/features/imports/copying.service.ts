@@ -12,7 +12,7 @@ import { hasRole, type Actor } from '../../http/actor.js';
 import { AppError, conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { toPlaceSnapshot } from '../calendars/calendars.mapper.js';
+import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
 import type { SkyDatesService } from '../calendars/sky-dates.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import { copiedEntries, type CopiedEntry } from './copied-entry.js';

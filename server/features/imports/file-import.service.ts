@@ -15,12 +15,12 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { AppError, conflict } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import type { UploadedFile } from '../../http/upload.js';
 import { anybody, withKeptGiver } from '../../policy/giver-naming.js';
 import { isForVillage } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf } from '../../policy/viewer.js';
 import type { WithdrawalList } from '../../storage/withdrawal-list.js';
+import type { IncomingFile } from '../attachments/attachment-files.service.js';
 import { knowsMarker, markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { readCalendarFile } from './calendar-file-reader.js';
@@ -40,7 +40,7 @@ export class FileImportService {
     actor: Actor,
     calendarId: string,
     { key, dryRun }: { key: string; dryRun: boolean },
-    uploaded: UploadedFile,
+    uploaded: IncomingFile,
   ): Promise<FileImport> {
     const file = readCalendarFile(await readFile(uploaded.path, 'utf8'));
     const from = {

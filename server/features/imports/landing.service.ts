@@ -15,7 +15,7 @@ import { settleShownUntil } from '../../policy/consent.repository.js';
 import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
-import { liveEntries, writeOrder } from '../calendars/calendars.repository.js';
+import { roomAtTheEnd } from '../calendars/draft-order.service.js';
 import { withSignsOfThisVillage } from '../signs/entry-signs.service.js';
 import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
 import { sharingOf } from '../calendars/entry-sharing.service.js';
@@ -82,14 +82,15 @@ async function land(
   at: Date,
 ): Promise<void> {
   if (entries.length === 0) return;
-  const before = (await liveEntries(manager, calendarId)).map(({ id }) => id);
-  if (before.length + entries.length > ENTRIES_MAX) throw conflict('too-many-entries');
+  const newIds = entries.map(({ id }) => id);
+  const room = await roomAtTheEnd(manager, calendarId, newIds);
+  if (room.first + entries.length > ENTRIES_MAX) throw conflict('too-many-entries');
   const { communityId, person } = actor;
   const touched = { updatedBy: person.id, updatedAt: at };
   const viewer = await viewerOf(manager, actor, at);
   for (const [index, { id, content: said, sameAs, variants, isToBeAsked }] of entries.entries()) {
     const content = await withSignsOfThisVillage(manager, viewer, said);
-    const position = before.length + index;
+    const position = room.first + index;
     await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
     if (sameAs === null) {
       const giverId = content.giverId ?? person.id;
@@ -111,7 +112,7 @@ async function land(
     }
   }
   await expectAnchored(manager, actor, calendarId, entries, at);
-  await writeOrder(manager, [...before, ...entries.map(({ id }) => id)]);
+  await room.takeIt();
   await recordContribution(manager, calendarId, person.id, at);
   await recordAudit(manager, {
     ...{ at, communityId, actorId: person.id, action: 'entries-brought-in' },

@@ -10,7 +10,7 @@ import type { Actor } from '../../http/actor.js';
 import { AppError, type FieldCode } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { viewerOf } from '../../policy/viewer.js';
-import { toPlaceSnapshot } from '../calendars/calendars.mapper.js';
+import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { IMPORT_WORDS, markerKeysByName, SEASONS } from './import-words.js';

@@ -110,7 +110,7 @@ export class FrozenContentService {
     const shown = await entriesForVillage(manager, passerBy, seen.entries.map(bodyOf));
     const sight = await entrySight(manager, passerBy, shown.map(thingOf));
     const open = shown.filter((entry) => sight.isOpen(thingOf(entry)));
-    const entries = await entriesForUse(manager, today, 'feed', open);
+    const entries = await entriesForUse(manager, today, 'feed', open, true);
     const { number, label, state, hash } = version;
     return { header: cutHeader(seen.header, entries).header, entries, number, label, state, hash };
   }
