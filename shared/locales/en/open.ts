@@ -32,7 +32,7 @@ export const texts = {
   foot: 'A page that the village opened itself, with what it shares with everybody. It is not for search engines.',
   board: {
     title: 'A page for everybody',
-    what: 'What is open of the newest published calendar, without any person’s name, for whoever has the address. It is off until you switch it on.',
+    what: 'What is open of the newest published calendar, and was agreed to for calendars on telephones, without any person’s name, for whoever has the address. Nobody asked is a no. It is off until you switch it on.',
     isOff: 'It is off.',
     isOn: 'It is on.',
     placeShown: 'How much of the place it tells',
