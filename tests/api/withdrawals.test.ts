@@ -2,6 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { erasersOf } from '#server/features/withdrawals/erasers.service.js';
 import { replayWithdrawals } from '#server/features/withdrawals/replay.service.js';
 import { AttachmentFilesService } from '#server/features/attachments/attachment-files.service.js';
+import { CONSENT_USES } from '#shared/contracts/consents.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { MadeFeed } from '#shared/contracts/exports.js';
 import type { Version } from '#shared/contracts/versions.js';
@@ -22,6 +23,7 @@ import {
   versionPath,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addConsent } from '#tests/support/consent-api.js';
 import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { copyTables, filesWith, putBack, tablesWith } from '#tests/support/search-everything.js';
@@ -83,6 +85,8 @@ describe('a withdrawn entry', () => {
   });
 
   it('is found nowhere any more, in tables, files, answers, prints and records', async () => {
+    // What leaves the village needs a yes.
+    await addConsent(village.officer, 'entry', entry.id, { uses: [...CONSENT_USES] });
     const before = await placesWith(WORD);
     expect(before.length).toBeGreaterThan(8);
     for (const file of ['calendar.ics', 'calendar.csv', 'calendar.json', 'feed.ics', 'open-page']) {
