@@ -63,6 +63,7 @@ test('somebody new comes in by a letter, and in again when the password is forgo
 
   await talu.goto('/sign-in');
   await talu.getByRole('link', { name: 'I have forgotten my password' }).click();
+  await expect(talu.getByRole('heading', { name: 'Forgotten your password' })).toBeVisible();
   await talu.getByLabel('E-mail address').fill(TALU);
   await talu.getByRole('button', { name: 'Send me a link' }).click();
   await expect(talu.getByText(/If the address belongs to an account/).last()).toBeVisible();
