@@ -175,6 +175,8 @@ test('what was on its way when the page went is sent again by itself, once', asy
   await page.unroute('**/api/calendars/**');
   await page.evaluate(() => dispatchEvent(new Event('online')));
   await expect(page.locator('.toast', { hasText: 'Saved: Sow.' }).last()).toBeVisible();
+  // The address names the saved entry, no new one any more.
+  await expect(page).toHaveURL(/entry=[\da-f]{8}-/u);
   await page.getByRole('button', { name: 'Save the entry' }).click();
   await expect(page.getByText('Nothing is changed.')).toBeVisible();
   expect(

@@ -18,8 +18,8 @@ export function useSendAgain({ edits, selection, canWrite }: Editor, { sendAgain
       if (!sending) continue;
       try {
         const saved = await sendAgain(entryId, sending);
-        say(t('editor.saved', { title: saved.content.titleOfficer }));
         if (selection.openId === entryId && saved.id !== entryId) selection.open(saved.id);
+        say(t('editor.saved', { title: saved.content.titleOfficer }));
       } catch {
         // Kept as it is: the next time, or the person's own save, tells what stands in the way.
       }
