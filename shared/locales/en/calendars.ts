@@ -1,3 +1,8 @@
+import { form } from './parts/calendar-form.js';
+import { sign } from './parts/calendar-sign.js';
+import { stale } from './parts/calendar-stale.js';
+import { warning } from './parts/calendar-warning.js';
+
 /** English texts for calendars, their draft and its entries. Keys with _one and _other follow i18next's plural rules. */
 export const texts = {
   kind: {
@@ -215,76 +220,7 @@ export const texts = {
     undated_other: 'Without a bar, because they have no date in {{year}}: {{titles}}.',
   },
 
-  form: {
-    label: 'The entry',
-    group: { what: 'What', when: 'When', signs: 'Signs', work: 'Do', trust: 'Trust', whose: 'Whose' },
-    nothing: 'nothing yet',
-    titleOfficer: 'Name of the work or rite ({{language}})',
-    titleVillage: 'In the words of the village ({{language}})',
-    kind: 'Kind',
-    icon: 'Picture on the board',
-    changeIcon: 'Choose another picture',
-    crop: 'Crop or variety',
-    notes: 'Notes',
-    notesHint: 'Where, who, how. Shown beside the entry, not printed on the board.',
-    caution: 'Caution',
-    cautionHint: 'What can hurt. It is printed wherever the entry is.',
-    leadType: 'What do its days count from?',
-    byMarker: 'A star or figure',
-    byMarkerNote: 'Its first or last day.',
-    bySign: 'Another sign of the sky',
-    bySignNote: 'The Sun, the light nights, a star at its height.',
-    byDate: 'A fixed date',
-    byDateNote: 'The same day every year, set by somebody.',
-    goesBy: 'Goes by',
-    chooseMarker: 'Choose a star or figure',
-    chooseSign: 'Choose a sign',
-    changeMarker: 'Choose another',
-    findMarker: 'Which sign falls near a day?',
-    its: 'Its',
-    occurrence: 'It happens twice in {{year}}. Which one?',
-    occurrences: 'Which one of {{year}}?',
-    nth: '{{nth}}. {{date}}',
-    nthNone: 'Number {{nth}}: not in {{year}}',
-    first: 'The first: {{date}}',
-    second: 'The second: {{date}}',
-    fixedDate: 'Date',
-    source: 'Who set it, and where it is written',
-    sourceHint: 'For instance: agricultural office, letter of 2 March.',
-    daysFromMorning: 'Days counted from that morning; a minus means before it.',
-    daysFromEvening: 'Days counted from that evening; a minus means before it.',
-    daysFromDay: 'Days counted from that day; a minus means before it.',
-    daysFromDate: 'Days counted from {{day}}; a minus means before it.',
-    daysFromNothing: 'Days counted from the day of the sign; a minus means before it.',
-    stepDays_one: '{{days}} day',
-    stepDays_other: '{{days}} days',
-    fixedLast: 'Fixed: {{source}}',
-    theSign: 'The sign',
-    fourDays: 'The days',
-    rangeBeside:
-      'The bracket shows between which days the sign can come; it stands beside the window and is not added to it.',
-    windowPicture: '{{window}} The sign comes {{range}}.',
-    windowPictureFixed: '{{window}}',
-    wholeEarlier: 'All a day earlier',
-    wholeLater: 'All a day later',
-    hasLastDate: 'It has a last date',
-    hasLastDateHint:
-      'For sowing, grazing, ice, burning: the responsible office’s date. A star may shorten it, never lengthen it.',
-    lastDate: 'Last date',
-    lastSource: 'Which office set it, and where it is written',
-    protectiveWatch: 'It is a protective watch',
-    protectiveWatchHint: 'Frost, flood, birds: a watch is never shortened.',
-    otherSigns: 'Other signs to wait for',
-    otherSignsHint: 'Soil, plants, birds, rain, the Moon. Say how many of them are needed.',
-    ifLate: 'What to do if it is late',
-    ifLateHint: 'Printed beside the entry: what still goes, what does not, whom to ask.',
-    giver: 'Who gave this knowledge',
-    moreOfIt: 'Kind, picture, crop, caution',
-    giverHint: 'A name, or how the person wants to be named.',
-    beliefPrint:
-      'An entry of belief is printed by what was agreed about it alone. It is written down under “What was agreed”, once the entry is saved.',
-    sharingLevel: 'Who may see it',
-  },
+  form,
 
   marker: {
     title: 'What shall it go by?',
@@ -321,119 +257,9 @@ export const texts = {
   },
 
   /** What can be set about a sign of the sky. */
-  sign: {
-    star: 'Star or figure',
-    twilight: { label: 'When', dusk: 'at dusk', dawn: 'at dawn' },
-    depth: {
-      label: 'How deep the Sun must be',
-      hint: 'Degrees below the horizon: the deeper, the darker.',
-      value: '{{depth}}°',
-      note: {
-        civil: 'the brightest stars show',
-        between: 'many stars show',
-        nautical: 'all but the faintest stars',
-        milkyWay: 'the Milky Way shows overhead; so people reckon, there is no published limit',
-        night: 'full night, no twilight left',
-      },
-    },
-    altitude: 'Height above the horizon',
-    altitudeHint: 'A fist at arm’s length is about 10°.',
-    degrees: '{{degrees}}°',
-    side: { label: 'On which side', east: 'in the east, climbing', west: 'in the west, sinking' },
-    clock: {
-      label: 'Counted from',
-      'after-sunset': 'sunset',
-      'before-sunrise': 'sunrise',
-      'solar-hour': 'an hour by the Sun',
-    },
-    minutes: 'Minutes before or after',
-    minutesValue_one: '{{count}} minute',
-    minutesValue_other: '{{count}} minutes',
-    facing: { label: 'Facing', south: 'south', north: 'north' },
-    solarHour: 'Hour by the Sun',
-    solarHourHint: 'Local sun time: at 12:00 the Sun stands highest, give or take a quarter of an hour.',
-    position: {
-      label: 'Where it stands, as you face the pole',
-      lowest: 'straight below',
-      highest: 'straight above',
-      left: 'on the left',
-      right: 'on the right',
-    },
-    event: { label: 'What is watched', sunrise: 'sunrise', sunset: 'sunset' },
-    azimuth: 'Direction',
-    pointName: 'Name of the point',
-    pointNameHint: 'How people call it: a notch, a hill, a tree. May stay empty.',
-    passage: { label: 'Which day', back: 'the first day it is back', gone: 'the last day it is seen' },
-    ridgeName: 'Name of the ridge',
-    ridgeNameHint: 'How people call it. May stay empty.',
-    end: {
-      label: 'Which night',
-      last: 'the last one before the light nights',
-      first: 'the first one after the light nights',
-    },
-    moonEvent: {
-      label: 'Which Moon',
-      new: 'new Moon',
-      'first-crescent': 'first crescent',
-      full: 'full Moon',
-    },
-    phenomenon: 'Counted from the star’s',
-    moonCount: 'Which one after it',
-    appearance: {
-      label: 'Which day of Venus',
-      'morning-first': 'first morning seen',
-      'morning-last': 'last morning seen',
-      'evening-first': 'first evening seen',
-      'evening-last': 'last evening seen',
-    },
-    sunCaution:
-      'Never look at the Sun, and never point glass or a lens at it. Use its light on a wall or a shadow.',
-  },
+  sign,
 
-  warning: {
-    title: 'Look at this',
-    stillSaves: 'You can save the draft all the same.',
-    'no-date-this-year': '{{marker}} has no {{phenomenon}} in {{year}}, so this entry has no days.',
-    'star-does-not-serve': '{{marker}} has no first or last days here, so no days can be counted from it.',
-    'sign-not-here': '{{sign}}: this never happens here, so no days can be counted from it. {{reason}}',
-    'one-occurrence-only': '{{marker}}: {{phenomenon}} happens only once in {{year}}.',
-    'weak-marker':
-      'The day of {{marker}} may vary by more than three weeks. Let other signs decide, or choose a sharper star.',
-    'never-disappears':
-      '{{marker}} is never hidden here, so people cannot notice that it comes back. Other signs should lead.',
-    'lost-in-light-nights':
-      '{{marker}} is lost in the light nights of summer, not behind the Sun; its return only says that nights are dark again.',
-    'window-closed-by-last-date':
-      'The last date, {{day}}, comes before the best days begin. Nothing is left of the window.',
-    'window-shortened-by-last-date':
-      'The last date, {{day}}, ends the window earlier than the days counted from the lead.',
-    'belief-not-agreed-to-print': 'An entry of belief is printed only after its giver was asked and agreed.',
-    'windows-overlap':
-      'Its best days and those of {{others}} lie within each other, and both are farm work on the same crop.',
-    'waits-for-actual-day':
-      'It is counted once the work before it is done. Write that day down at the other entry when it is known.',
-    'anchor-without-days': 'The work that it is counted from has no days this year.',
-    'anchor-gone':
-      'The work that it is counted from is not in the draft any more, or fewer people may see it than this entry.',
-    sign: {
-      'no-date-this-year': '{{sign}}: not in {{year}}, so this entry has no days.',
-      'one-occurrence-only': '{{sign}}: {{year}} has fewer of them than this entry counts.',
-    },
-    way: {
-      otherStar: 'Choose another star',
-      otherSign: 'Choose another sign',
-      otherDay: 'Go by its {{phenomenon}}',
-      useFirst: 'Go by the first one',
-      changeDays: 'Change the days',
-      changeLastDate: 'Change the last date',
-      writeSigns: 'Write other signs',
-      fixedDate: 'Go by a fixed date',
-      byPlanned: 'Go by its planned day',
-      otherPeople: 'Say who else does it',
-      writeCaution: 'Write the caution',
-      seeDrift: 'See how it moved',
-    },
-  },
+  warning,
 
   /** What to look at besides the days themselves. */
   advice: {
@@ -504,44 +330,7 @@ export const texts = {
     toList: 'To the calendars',
   },
 
-  stale: {
-    title: 'Two people wrote to this entry',
-    lead: '{{name}} saved a newer text ({{when}}). Choose what stays; nothing of yours is lost until you have chosen.',
-    unit: {
-      titleOfficer: 'Name',
-      titleVillage: 'Name in the words of the village',
-      kind: 'Kind',
-      icon: 'Picture',
-      crop: 'Crop or variety',
-      notes: 'Notes',
-      caution: 'Caution',
-      lead: 'Goes by',
-      offsets: 'The four days',
-      lastDate: 'Last date and watch',
-      otherSigns: 'Other signs',
-      ifLate: 'If late',
-      giver: 'Who gave it',
-      record: 'The record for elders and the field',
-      agreedToPrint: 'Agreed to print',
-      board: 'What the board shows',
-      sharingLevel: 'Who may see it',
-    },
-    theirs: 'Saved by {{name}}',
-    mine: 'Written by you',
-    empty: 'empty',
-    yes: 'yes',
-    no: 'no',
-    noLastDate: 'no last date',
-    noLastDateWatch: 'no last date, a protective watch',
-    lastDateIs: '{{day}}, {{source}}',
-    offsetsAre: '{{earliest}}, {{bestFrom}}, {{bestTo}} and {{lastAdvised}} days',
-    onlyYou: 'Only you changed this.',
-    onlyThey: 'Only {{name}} changed this.',
-    both: 'Both of you changed this.',
-    save: 'Save what I chose',
-    missing: 'choose one text for each',
-    throwMine: 'Take all of {{name}}’s text',
-  },
+  stale,
 
   /** While others work in the same draft. */
   live: {
