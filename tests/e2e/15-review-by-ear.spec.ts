@@ -96,6 +96,7 @@ test('twelve entries are heard and answered with four buttons, two of them by vo
     const progress = new RegExp(`^${before.length + done} of ${total} entries answered`, 'u');
     await expect(page.getByRole('img', { name: progress })).toBeVisible();
     for (const name of words) await expect(four.getByRole('button', { name, exact: true })).toBeInViewport();
+    const address = page.url();
     const title = await page.locator('#entry-title').innerText();
     if (done === 0) {
       await page.getByRole('button', { name: 'Read it aloud' }).click();
@@ -111,6 +112,8 @@ test('twelve entries are heard and answered with four buttons, two of them by vo
     if (done === 3 || done === 7) await changeByVoice(page);
     else await four.getByRole('button', { name: 'Agree', exact: true }).click();
     await expect.poll(async () => (await answers()).length).toBe(before.length + done + 1);
+    // The next answer belongs to the next entry: it has to be on screen.
+    await expect(page).not.toHaveURL(address);
     // Whatever was being read stops with the entry.
     if (done === 0) await expect.poll(async () => (await heard(page)).at(-1)?.text).toBe('(stopped)');
     if (done + 1 < TWELVE) await expect(page.locator('#entry-title')).toBeVisible();
