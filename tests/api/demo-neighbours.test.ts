@@ -3,6 +3,7 @@ import { seedNeighbourCalendars } from '#server/features/demo/demo-neighbours.se
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { OwnEntries } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
+import { boardOf } from '#shared/calendar/variants.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import { textOf } from '#tests/support/every-endpoint.js';
 
@@ -28,11 +29,12 @@ async function versionOne(client: Client): Promise<Version> {
 const titlesOf = ({ entries }: Version) => entries.map(({ content }) => content.titleOfficer);
 
 describe('the second village of the demo', () => {
-  it('has its calendar published, every entry with its days, three with another keeper’s timing', async () => {
+  it('has its calendar published with days, three entries with another keeper’s timing; earthing-up waits for the planting', async () => {
     const version = await versionOne(await api.signIn('officer2'));
-    expect(version).toMatchObject({ state: 'published', label: '2027-1', entryCount: 10, keptCount: 1 });
+    expect(version).toMatchObject({ state: 'published', label: '2027-1', entryCount: 11, keptCount: 1 });
     const undated = version.entries.filter(({ dates }) => dates.window === null);
-    expect(titlesOf({ ...version, entries: undated })).toEqual([]);
+    expect(titlesOf({ ...version, entries: undated })).toEqual(['Earthing-up']);
+    expect(undated[0]?.dates.counted?.basis).toBe('waiting');
     expect(version.entries.filter(({ variants = [] }) => variants.length > 0)).toHaveLength(3);
   });
 
@@ -58,11 +60,28 @@ describe('the second village of the demo', () => {
 describe('the third village of the demo', () => {
   it('has its calendar in review, with every entry’s days though no star serves in summer', async () => {
     const version = await versionOne(await api.signIn('officer3'));
-    expect(version).toMatchObject({ state: 'in-review', entryCount: 11, keptCount: 1 });
+    expect(version).toMatchObject({ state: 'in-review', entryCount: 12, keptCount: 1 });
     const undated = version.entries.filter(({ dates }) => dates.window === null);
     expect(titlesOf({ ...version, entries: undated })).toEqual([]);
     const byNature = version.entries.filter(({ content }) => content.lead.type === 'nature-sign');
     expect(titlesOf({ ...version, entries: byNature })).toEqual(['Sow oats and fodder', 'Plant potato']);
+  });
+
+  it('keeps both families’ signs of the ice beside the authority’s day; the earlier closing counts', async () => {
+    const version = await versionOne(await api.signIn('officer3'));
+    const road = version.entries.find(({ content }) => content.titleOfficer === 'Stop using the ice road');
+    if (!road) throw new Error('The ice road is not there');
+    expect(road.content.lead).toMatchObject({ type: 'fixed-date' });
+    expect(road.content.lastDate?.source).toBe('Road authority');
+    expect(road.variants?.map(({ content }) => content.giver).sort()).toEqual([
+      'A family of the shore',
+      'A family of the upper bank',
+    ]);
+    const variants = (road.variants ?? []).map((variant) => ({ ...variant, forBoard: true }));
+    const board = boardOf({ ...road, variants });
+    expect(board.drivenBy).toBe('later-start-earlier-end');
+    expect(board.window?.lastAdvised).toBe('2027-05-01');
+    expect(board.beside).toHaveLength(3);
   });
 
   it('asks its pickers about the berry week', async () => {

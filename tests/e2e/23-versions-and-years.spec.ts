@@ -15,7 +15,7 @@ test('the officer compares, sets the draft back and looks ten years ahead', asyn
   const sowing = page.getByRole('region', { name: 'Sow long millet' });
   await expect(sowing).toContainText('Why: the days from the lead, changed by hand.');
   await page.getByRole('radio', { name: 'Days', exact: true }).press('Space');
-  await expect(page.getByText('1 entry differs in its days.')).toBeVisible();
+  await expect(page.getByText('3 entries differ in their days.')).toBeVisible();
   await expect(page.getByRole('region', { name: 'Sow short millet' })).toHaveCount(0);
   await page.getByRole('radio', { name: 'Side by side' }).press('Space');
   await expect(page.getByRole('table', { name: 'Every difference, before and now' })).toContainText('17');

@@ -54,6 +54,21 @@ export function byStar(
   return { type: 'marker', markerKey, phenomenon, occurrence: 1 };
 }
 
+/** The day on which the work of that code is really done. */
+export function onTheDayOf(code: string): EntryLead {
+  return { type: 'entry-actual', entryId: code };
+}
+
+/** What goes by the work of a code, once that work has its id. */
+export function withKnownWork(content: EntryInput, idByCode: ReadonlyMap<string, string>): EntryInput {
+  const { lead } = content;
+  if (lead.type !== 'entry-actual') return content;
+  const entryId = idByCode.get(lead.entryId);
+  if (entryId === undefined)
+    throw new Error(`The demo has no entry ${lead.entryId} before ${content.titleOfficer}`);
+  return { ...content, lead: { ...lead, entryId } };
+}
+
 export function bySign(spec: Extract<EntryLead, { type: 'sky' }>['spec']): EntryLead {
   return { type: 'sky', spec, occurrence: 1 };
 }

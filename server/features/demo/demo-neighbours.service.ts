@@ -19,7 +19,7 @@ import { VariantsService } from '../variants/variants.service.js';
 import { FrozenContentService } from '../versions/frozen-content.service.js';
 import { PublishingService } from '../versions/publishing.service.js';
 import { VersionsService } from '../versions/versions.service.js';
-import type { DemoEntry, DemoVariant } from './demo-entry.js';
+import { withKnownWork, type DemoEntry, type DemoVariant } from './demo-entry.js';
 import { DEMO_DOMAIN, THOLMERE_LANDING, VARDESCA_TERRACES, type DemoVillage } from './demo-villages.data.js';
 import { BERRY_WEEK, THOLMERE_ENTRIES, THOLMERE_VARIANTS } from './tholmere-entries.data.js';
 import { LAMP_EVENING, VARDESCA_ENTRIES, VARDESCA_VARIANTS } from './vardesca-entries.data.js';
@@ -115,7 +115,7 @@ class NeighbourRound {
     });
     const idByCode = new Map<string, string>();
     for (const { code, content } of neighbour.entries) {
-      idByCode.set(code, (await entries.add(officer, id, content)).id);
+      idByCode.set(code, (await entries.add(officer, id, withKnownWork(content, idByCode))).id);
     }
     const variants = new VariantsService(dataSource, clock, sky);
     for (const { code, by, content } of neighbour.variants) {

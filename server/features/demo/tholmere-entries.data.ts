@@ -8,6 +8,7 @@ import {
   type DemoEntry,
   type DemoVariant,
 } from './demo-entry.js';
+import { ICE_ROAD, ICE_ROAD_FAMILIES } from './tholmere-ice-road.data.js';
 
 const BELT_AT_NINE = bySign({
   kind: 'due-meridian',
@@ -21,8 +22,7 @@ const FIRST_STARS = bySign({ kind: 'dark-night', end: 'first', depthDeg: 6 });
 
 /**
  * The year of Tholmere Landing, an invented village: titles, windows and customs are made up for this product and need
- * an agronomist before any real use. The ice road (C05) goes by a log and a notice, by neither of which an entry can be led
- * yet, so it stays out.
+ * an agronomist before any real use.
  */
 export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
   demoEntry('C01', {
@@ -71,6 +71,7 @@ export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
     ifLate: 'Plant unchitted',
     giver: 'Elder C-2',
   }),
+  ICE_ROAD,
   demoEntry('C06', {
     titleVillage: 'Nǭst mësk',
     titleOfficer: 'Net and boat overhaul',
@@ -158,8 +159,9 @@ export const THOLMERE_ENTRIES: readonly DemoEntry[] = [
   }),
 ];
 
-/** Another keeper counts from the river, not from the birch. */
+/** Two families read the ice by other signs; another keeper counts from the river, not from the birch. */
 export const THOLMERE_VARIANTS: readonly DemoVariant[] = [
+  ...ICE_ROAD_FAMILIES,
   {
     code: 'C08',
     by: 'elder-c3',

@@ -1,11 +1,19 @@
-import { byStar, bySign, days, demoEntry, lastDay, type DemoEntry, type DemoVariant } from './demo-entry.js';
+import {
+  byStar,
+  bySign,
+  days,
+  demoEntry,
+  lastDay,
+  onTheDayOf,
+  type DemoEntry,
+  type DemoVariant,
+} from './demo-entry.js';
 
 const OFFICE = 'Provincial agricultural office';
 
 /**
  * The year's work of Vardesca Terraces, an invented village: titles, windows and customs are made up for this product
- * and need an agronomist before any real use. B09 (earthing-up) goes by the day on which somebody really planted; there
- * is no such leading day yet, so it stays out.
+ * and need an agronomist before any real use.
  */
 export const VARDESCA_ENTRIES: readonly DemoEntry[] = [
   demoEntry('B12', {
@@ -128,6 +136,19 @@ export const VARDESCA_ENTRIES: readonly DemoEntry[] = [
     otherSigns: 'Often clouded out: use the date',
     ifLate: 'Stop; keep seed for next year',
     giver: 'The officer',
+  }),
+  demoEntry('B09', {
+    titleVillage: 'Pesûn sàlin',
+    titleOfficer: 'Earthing-up',
+    kind: 'farm',
+    icon: 'hoe',
+    crop: 'potato',
+    notes: 'Men and women in pairs.',
+    lead: onTheDayOf('B06'),
+    offsets: days(35, 45, 60, 75),
+    otherSigns: 'Plants two hands high',
+    ifLate: 'Do the wettest terraces first',
+    giver: 'Elder B-1',
   }),
   demoEntry('B10', {
     titleVillage: 'Lûn kèsa',
