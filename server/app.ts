@@ -51,6 +51,8 @@ import { peopleRoutes } from './features/people/people.routes.js';
 import { PeopleService } from './features/people/people.service.js';
 import { weatherRoutes } from './features/weather/weather.routes.js';
 import { WeatherService } from './features/weather/weather.service.js';
+import { wordListsRoutes } from './features/word-lists/word-lists.routes.js';
+import { WordListsService } from './features/word-lists/word-lists.service.js';
 import { signsRoutes } from './features/signs/signs.routes.js';
 import { SignsService } from './features/signs/signs.service.js';
 import { figuresRoutes } from './features/figures/figures.routes.js';
@@ -240,6 +242,7 @@ export function createApp(options: AppOptions): App {
   const weather = new WeatherService(dataSource, clock);
   weatherRoutes(mount, weather);
   signsRoutes(mount, new SignsService(dataSource, clock));
+  wordListsRoutes(mount, new WordListsService(dataSource, clock));
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));
   airRoutes(mount, new AirService(places, skyYears));

@@ -200,6 +200,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   findTimeZone: 'is a name of a zone',
   readWeather: 'is notices of an office and rain, which all of the village read',
   listNotices: 'is notices of an office',
+  readWordLists: 'is what all of the village call kinds, work and crops',
   listSkyMarkers: 'names signs of the Sun and of stars of the table',
   readChart: 'is stars of the table',
   listCalendars: 'counts what the person sees',

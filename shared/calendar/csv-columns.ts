@@ -4,7 +4,7 @@
  *
  * - `text`: words as they are; what a spreadsheet would run as a formula has an apostrophe in front (`csvText` puts it
  *   there, `csvWords` takes it off), numbers such as -5 have none
- * - `code`: a word of a closed list of the contracts, e.g. `farm`, `heliacal-rising`
+ * - `code`: a word of a closed list of the contracts, e.g. `farm`, `heliacal-rising`; a kind may stand in the village's word
  * - `whole-number`: digits with an optional minus; offsets count days from the leading day
  * - `iso-date`: `YYYY-MM-DD`, Gregorian
  * - `month-day`: `MM-DD`, a day of every year

@@ -42,6 +42,7 @@ export const AUDIT_ACTIONS = [
   'notice-removed',
   'rain-written',
   'rain-removed',
+  'words-changed',
   'attachment-added',
   'attachment-words-written',
   'group-founded',

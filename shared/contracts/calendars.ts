@@ -4,6 +4,7 @@ import { defineEndpoint, member, signedIn } from './endpoint.js';
 import { actualDays } from './actual-days.js';
 import { entryLead } from './entry-lead.js';
 import { eventRecord } from './event-record.js';
+import { villageWord } from './village-word.js';
 import { ROLES } from './people.js';
 import { groupFitsLevel, PLAIN_DETAILS, sharingDetails, sharingLevel } from './sharing.js';
 import { occurrenceDays } from './stars.js';
@@ -98,6 +99,8 @@ const entryFields = z.strictObject({
   titleVillage: line(120),
   titleOfficer: line(120, 1),
   kind: entryKind,
+  /** What the village calls this kind; left out where it keeps the usual name. Rules go by the kind alone. */
+  kindWord: villageWord.optional(),
   icon: entryIcon,
   crop: line(120),
   notes: text(2000),

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { FIRST_YEAR, LAST_YEAR } from '../sky/vocabulary.js';
 import { id, isoDate, line, monthDay, text } from './common.js';
+import { villageWord } from './village-word.js';
 
 export const RECORD_SIGNS_MAX = 12;
 export const LEAD_DAYS_MAX = 120;
@@ -93,6 +94,8 @@ const recordFields = z.strictObject({
     operation: z.enum(OPERATIONS).nullable(),
     /** What `other` is. */
     ownOperation: line(80),
+    /** What the village calls this work; left out where it keeps the usual name. */
+    operationWord: villageWord.optional(),
     /** From sowing to harvest, as long as its people know it. */
     variety: z.strictObject({
       name: line(80),

@@ -37,6 +37,7 @@ import { actualDaysEndpoints } from './actual-days.js';
 import { variantsEndpoints } from './variants.js';
 import { withdrawalsEndpoints } from './withdrawals.js';
 import { weatherEndpoints } from './weather.js';
+import { wordListsEndpoints } from './word-lists.js';
 import { versionsEndpoints } from './versions.js';
 
 /** Every operation of the API. The server mounts exactly these; OpenAPI and the permission table list them. */
@@ -79,5 +80,6 @@ export const ENDPOINTS: readonly Endpoint[] = [
   auditEndpoints,
   todayEndpoints,
   weatherEndpoints,
+  wordListsEndpoints,
   lookEndpoints,
 ].flatMap((group) => Object.values(group) as Endpoint[]);

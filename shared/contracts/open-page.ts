@@ -24,6 +24,7 @@ const openEntry = z.strictObject({
   titleOfficer: z.string(),
   kind: entryKind,
   icon: entryIcon,
+  kindWord: z.string().optional(),
   crop: z.string(),
   otherSigns: z.string(),
   ifLate: z.string(),

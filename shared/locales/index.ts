@@ -39,6 +39,7 @@ import { texts as today } from './en/today.js';
 import { texts as variants } from './en/variants.js';
 import { texts as versions } from './en/versions.js';
 import { texts as weather } from './en/weather.js';
+import { texts as words } from './en/words.js';
 import { texts as withdrawals } from './en/withdrawals.js';
 
 /**
@@ -72,6 +73,7 @@ export const en = {
   record,
   signs,
   weather,
+  words,
   reviews,
   rollovers,
   sharing,

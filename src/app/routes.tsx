@@ -63,6 +63,11 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: ['people', 'signs', 'record', 'sharing'],
     load: () => import('./routes/village-signs.js'),
   },
+  {
+    path: PATTERNS.villageWords,
+    texts: ['people', 'words', 'calendars', 'record'],
+    load: () => import('./routes/village-words.js'),
+  },
   { path: PATTERNS.newFigure, texts: ['figures'], load: () => import('./routes/figure-new.js') },
   {
     path: PATTERNS.figure,

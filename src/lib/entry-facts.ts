@@ -73,7 +73,11 @@ export function useEntryFacts(): EntryFacts {
         const record = recordFacts(content.record);
         return {
           what: told([
-            { key: 'kind', label: t('form.kind'), value: t(`kind.${content.kind}`) },
+            {
+              key: 'kind',
+              label: t('form.kind'),
+              value: content.kindWord?.word ?? t(`kind.${content.kind}`),
+            },
             { key: 'crop', label: t('form.crop'), value: content.crop },
             ...record.what,
             { key: 'notes', label: t('form.notes'), value: content.notes },

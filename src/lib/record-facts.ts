@@ -27,11 +27,14 @@ export function useRecordFacts(): (record: EventRecord | undefined) => Record<Re
     const told = (facts: RecordFact[]) => facts.filter(({ value }) => value !== '');
     const days = (count: number | null) => (count === null ? '' : t('days', { count, days: count }));
     const monthDay = (day: RecordSignDay) => dates.day({ year: PLAIN_YEAR, ...day });
-    const what = ({ what: { operation, ownOperation, variety, land } }: EventRecord) => [
+    const what = ({ what: { operation, ownOperation, operationWord, variety, land } }: EventRecord) => [
       {
         key: 'operation',
         label: t('operation.label'),
-        value: operation === null ? '' : operation === 'other' ? ownOperation : t(`operation.${operation}`),
+        value:
+          operation === null
+            ? ''
+            : (operationWord?.word ?? (operation === 'other' ? ownOperation : t(`operation.${operation}`))),
       },
       {
         key: 'variety',

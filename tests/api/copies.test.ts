@@ -19,6 +19,7 @@ import { addConsent } from '#tests/support/consent-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { firstPlace } from '#tests/support/place-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
+import { addWord } from '#tests/support/words-api.js';
 
 /** From one village to another, by somebody who compiles for both. */
 let api: TestApi;
@@ -49,7 +50,9 @@ beforeAll(async () => {
   });
   const by = (markerKey: string) =>
     ({ type: 'marker', markerKey, phenomenon: 'heliacal-rising', occurrence: 1 }) as const;
+  const own = await addWord(officer, 'kinds', { like: 'farm', word: `Work of ${NAME}` });
   const sow = await addEntry(officer, fromId, {
+    kindWord: { id: own.key, word: own.word },
     ...{ giver: NAME, giverId: elder.personId, notes: `Ask ${NAME}`, sharingLevel: 'open' },
     ...{ hasLastDate: true, lastDate: { date: { month: 7, day: 5 }, source: `Office of ${NAME}` } },
     record: {

@@ -41,6 +41,7 @@ import { RainDayEntity } from './rain-day.entity.js';
 import { WeatherNoticeEntity } from './weather-notice.entity.js';
 import { ActualDateEntity } from './actual-date.entity.js';
 import { VillageGroupEntity } from './village-group.entity.js';
+import { WordListEntity } from './word-list.entity.js';
 import { WriteKeyEntity } from './write-key.entity.js';
 
 /** Named one by one: a glob would miss a file quietly, and breaks in a build. */
@@ -57,6 +58,7 @@ export const ENTITIES = [
   SignSightingEntity,
   WeatherNoticeEntity,
   RainDayEntity,
+  WordListEntity,
   CalendarEntity,
   EntryEntity,
   DeathEntity,

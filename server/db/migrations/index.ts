@@ -25,6 +25,7 @@ import { Weather1799000100000 } from './1799000100000-weather.js';
 import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.js';
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
+import { WordLists1799300000000 } from './1799300000000-word-lists.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -55,4 +56,5 @@ export const MIGRATIONS = [
   RolloverGrounds1799100000000,
   RestoredEntries1799110000000,
   WriteKeys1799200000000,
+  WordLists1799300000000,
 ];

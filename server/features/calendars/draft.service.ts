@@ -8,6 +8,7 @@ import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { AppError, notFound } from '../../http/app-error.js';
 import { everyVillageFigure } from '../figures/village-figures.service.js';
 import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
+import { inVillageWords, knownWords } from '../word-lists/known-words.service.js';
 import { liveEntries } from './calendars.repository.js';
 import { withAnchors } from './anchored-draft.service.js';
 import type { SkyDatesService } from './sky-dates.service.js';
@@ -73,7 +74,7 @@ export async function forgetContributions(manager: EntityManager, calendarId: st
   await manager.delete(DraftContributionEntity, { calendarId });
 }
 
-/** The draft as it stands, with the dates of today's engine. */
+/** The draft as it stands, with the dates of today's engine and in today's words of the village. */
 export async function readDraft(
   manager: EntityManager,
   sky: SkyDatesService,
@@ -83,7 +84,11 @@ export async function readDraft(
     ...toPlaceSnapshot(await manager.findOneByOrFail(PlaceEntity, { id: calendar.placeId })),
     figures: await everyVillageFigure(manager, calendar.communityId),
   };
-  const rows = await liveEntries(manager, calendar.id);
+  const words = await knownWords(manager, calendar.communityId);
+  const rows = (await liveEntries(manager, calendar.id)).map((row) => ({
+    ...row,
+    content: inVillageWords(row.content, words),
+  }));
   const dates = sky.datesOf(
     place,
     calendar.year,

@@ -28,6 +28,7 @@ import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { expectTellableSigns, withListedSigns } from '../signs/entry-signs.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { expectKnownWords, inVillageWords, knownWords } from '../word-lists/known-words.service.js';
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
@@ -60,7 +61,9 @@ export class EntriesService {
       const viewer = await this.viewer(manager, actor);
       await expectKnownMarker(manager, viewer, input, 'lead');
       const writing = { entryId: null, stored: null, written: input, prefix: '' };
-      const content = await withListedSigns(manager, viewer, writing);
+      const words = await knownWords(manager, actor.communityId);
+      expectKnownWords(input, words, '');
+      const content = inVillageWords(await withListedSigns(manager, viewer, writing), words);
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
       await shareNewEntry(manager, actor, id, content);
@@ -80,11 +83,13 @@ export class EntriesService {
         throw stale(await this.one(manager, actor, calendar, entryId), input);
       const viewer = await this.viewer(manager, actor);
       const shared = (await sharedById(manager, 'entry', [entryId])).get(entryId);
-      const stored = row.content;
+      const words = await knownWords(manager, actor.communityId);
+      expectKnownWords(input.content, words, 'content.');
+      const stored = inVillageWords(row.content, words);
       const written = withKeptGiver(viewer, shared, stored, input.content);
       const writing = { entryId, stored, written, prefix: 'content.' };
-      const content = await withListedSigns(manager, viewer, writing);
-      const fields = changedFields(row.content, content);
+      const content = inVillageWords(await withListedSigns(manager, viewer, writing), words);
+      const fields = changedFields(stored, content);
       if (fields.includes('lead')) {
         await expectKnownMarker(manager, viewer, content, 'content.lead');
       }

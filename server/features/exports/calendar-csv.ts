@@ -41,7 +41,8 @@ function lineOf(
   const { window, marker } = dates;
   const stateWord = t(`ics.state.${state ?? 'draft'}`);
   return {
-    ...{ titleVillage, titleOfficer, kind, icon, crop, otherSigns, ifLate, caution, notes },
+    ...{ titleVillage, titleOfficer, icon, crop, otherSigns, ifLate, caution, notes },
+    kind: entry.kindWord?.word ?? kind,
     earliest: window && window.earliest,
     bestFrom: window && window.bestFrom,
     bestTo: window && window.bestTo,

@@ -147,7 +147,7 @@ function eventOfEntry(entry: VersionEntryBody, calendarId: string, texts: Texts)
       title: titleOf(content),
       from: window.bestFrom,
       to: window.bestTo,
-      category: kinds(`kind.${content.kind}`),
+      category: kindIn(content, kinds),
       sentences: [
         content.protectiveWatch
           ? words.watchFromTo({ from: window.bestFrom, to: window.bestTo })
@@ -164,6 +164,10 @@ function eventOfEntry(entry: VersionEntryBody, calendarId: string, texts: Texts)
       ],
     },
   ];
+}
+
+function kindIn({ kind, kindWord }: EntryInput, kinds: Translate): string {
+  return kindWord?.word ?? kinds(`kind.${kind}`);
 }
 
 function isOnlyMarker({ kind, lead }: EntryInput): boolean {
@@ -194,7 +198,8 @@ function eventsOfMarkers(
       lead.type === 'sky'
         ? skySign(lead.spec, name, { t: sky, compassPoint })
         : files('sheet.shows', { name, phenomenon: sky(`phenomenon.${lead.phenomenon}`) });
-    const told = content.kind === 'marker-only' ? titleOf(content) : null;
+    const isTold = content.kind === 'marker-only';
+    const told = isTold ? titleOf(content) : null;
     const date = expected.gregorian;
     if (found.has(key) && told === null) continue;
     found.set(key, {
@@ -202,7 +207,7 @@ function eventsOfMarkers(
       title: told ?? sign,
       from: date,
       to: date,
-      category: kinds('kind.marker-only'),
+      category: isTold ? kindIn(content, kinds) : kinds('kind.marker-only'),
       sentences: [
         words.markerSentence({
           phenomenon: sign,

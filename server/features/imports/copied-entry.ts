@@ -90,12 +90,16 @@ function unseen(lead: EntryLead): EntryLead {
   return lead.type === 'marker-as-seen' ? { ...lead, seen: null } : lead;
 }
 
-/** What and when, the signs and what is to be done early or late: as words of its own, without people. */
+/**
+ * What and when, the signs and what is to be done early or late: as words of its own, without people. A kind of work that
+ * the village named is the built-in one that it behaves like.
+ */
 function recordElsewhere({ what, when, signs, work }: EventRecord): EventRecord {
   const { inputs, ifEarly, ifLaterStill } = work;
+  const { operationWord: _word, ...plainWhat } = what;
   return {
     ...EMPTY_RECORD,
-    ...{ what, when },
+    ...{ what: plainWhat, when },
     signs: { ...signs, list: signs.list.map(({ sharedId: _listed, ...words }) => words) },
     work: { ...EMPTY_RECORD.work, inputs, ifEarly, ifLaterStill },
   };

@@ -1,9 +1,11 @@
 import { WELL_KNOWN_KEYS, allMarkerKeys, markerNamesOf } from '../stars/marker-names.service.js';
 import { plainWords, type ImportWords } from '#shared/calendar/import-dates.js';
-import type { EntryKind } from '#shared/contracts/calendars.js';
+import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
+import type { VillageWord } from '#shared/contracts/village-word.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import { texts as calendarTexts } from '#shared/locales/en/calendars.js';
 import { texts } from '#shared/locales/en/imports.js';
+import type { KnownWords } from '../word-lists/known-words.service.js';
 
 const { words } = texts;
 
@@ -28,10 +30,33 @@ const KINDS: ReadonlyMap<string, string> = new Map([
   ...keyByName(words.kinds),
 ]);
 
-export function kindOf(text: string): EntryKind | null {
+/** What a village calls kinds of events, by plain words. */
+export type VillageKinds = ReadonlyMap<string, { kind: EntryKind; kindWord: VillageWord }>;
+
+export function villageKinds({ kinds }: KnownWords): VillageKinds {
+  return new Map(
+    [...kinds.values()].flatMap(({ key, like, word }) => {
+      if (word === '' || !isKind(like)) return [];
+      const kindWord = key === like ? { word } : { id: key, word };
+      return [[plainWords(word), { kind: like, kindWord }] as const];
+    }),
+  );
+}
+
+/** The village's own words come before all others. */
+export function kindOf(
+  text: string,
+  village: VillageKinds,
+): { kind: EntryKind | null; kindWord?: VillageWord } {
   const plain = plainWords(text);
+  const own = village.get(plain);
+  if (own) return own;
   const kind = KINDS.get(plain) ?? plain;
-  return kind in words.kinds ? (kind as EntryKind) : null;
+  return { kind: isKind(kind) ? kind : null };
+}
+
+function isKind(code: string | null): code is EntryKind {
+  return ENTRY_KINDS.some((kind) => kind === code);
 }
 
 /** Stars and figures by every name that the village has for them; its own figures come before all others. */

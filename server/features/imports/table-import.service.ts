@@ -13,7 +13,8 @@ import { viewerOf } from '../../policy/viewer.js';
 import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
-import { IMPORT_WORDS, markerKeysByName, SEASONS } from './import-words.js';
+import { knownWords } from '../word-lists/known-words.service.js';
+import { IMPORT_WORDS, markerKeysByName, SEASONS, villageKinds } from './import-words.js';
 import { landOnce } from './landing.service.js';
 import { entryOfLine } from './table-line.js';
 
@@ -66,6 +67,7 @@ export class TableImportService {
     const facts = {
       ...{ words: IMPORT_WORDS, dayOrder, calendarYear: year },
       ...{ markerKeyOf: markerKeysByName(figures), signKeyOf: SEASONS },
+      villageKinds: villageKinds(await knownWords(manager, actor.communityId)),
     };
     const read = lines.map((line) => {
       const { content, problems } = entryOfLine(line, facts);

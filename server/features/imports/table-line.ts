@@ -18,19 +18,24 @@ import {
 import type { ImportColumn, ReadLine, TableLine } from '#shared/contracts/imports.js';
 import type { MonthDay } from '#shared/contracts/common.js';
 import { fieldErrors } from '../../http/field-errors.js';
-import { DAY_SOURCE, kindOf, YES } from './import-words.js';
+import { DAY_SOURCE, kindOf, YES, type VillageKinds } from './import-words.js';
 
 type Problem = ReadLine['problems'][number];
 type Cells = TableLine['cells'];
 
+/** What tables are read by: days and stars, and what this village calls kinds of events. */
+export interface TableFacts extends ImportDateFacts {
+  villageKinds: VillageKinds;
+}
+
 /** An entry from one line of a table, or everything that is the matter with it. */
 export function entryOfLine(
   { cells }: TableLine,
-  facts: ImportDateFacts,
+  facts: TableFacts,
 ): { content: EntryInput | null; problems: Problem[] } {
   const cell = (column: ImportColumn) => (cells[column] ?? '').trim();
   const timing = timingOf(cells, facts);
-  const kind = kindOf(cell('kind'));
+  const { kind, kindWord } = kindOf(cell('kind'), facts.villageKinds);
   const lastDate = fixedDay(cell('lastDate'), facts);
   const problems = [
     ...timing.problems,
@@ -41,6 +46,7 @@ export function entryOfLine(
     titleVillage: cell('titleVillage'),
     titleOfficer: cell('titleOfficer'),
     kind: kind ?? 'farm',
+    ...(kindWord && { kindWord }),
     icon: iconOf(cell('icon'), kind ?? 'farm'),
     crop: cell('crop'),
     notes: cell('notes'),
@@ -56,7 +62,10 @@ export function entryOfLine(
     agreedToPrint: false,
     // Nobody has agreed to anything: what is believed stays with the elders, all else with the village.
     sharingLevel: kind === 'belief' ? 'elders' : 'village',
-  } satisfies Record<keyof Omit<EntryInput, 'giverId' | 'board' | 'sharing' | 'record'>, unknown>);
+  } satisfies Record<
+    keyof Omit<EntryInput, 'giverId' | 'board' | 'sharing' | 'record' | 'kindWord'>,
+    unknown
+  >);
   if (!words.success) {
     for (const { field, code } of fieldErrors(words.error.issues)) {
       problems.push({ column: columnOf(field, cells), code });

@@ -249,7 +249,7 @@ export class PeopleService {
 }
 
 /** Changes of people wait for each other, so that two stewards cannot remove one another at once. */
-async function lockCommunity(manager: EntityManager, communityId: string): Promise<CommunityEntity> {
+export async function lockCommunity(manager: EntityManager, communityId: string): Promise<CommunityEntity> {
   return manager.findOneOrFail(CommunityEntity, {
     where: { id: communityId },
     lock: { mode: 'pessimistic_write' },

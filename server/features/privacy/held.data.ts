@@ -52,6 +52,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   sign: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   weather_notice: row('knowledge', ['written_by'], ['id', 'issued_on', 'written_at']),
   rain_day: row('knowledge', ['written_by'], 'all'),
+  word_list: row('knowledge', ['updated_by'], ['community_id', 'list', 'updated_at']),
   sign_sighting: row('knowledge', ['marked_by'], 'all'),
   item_sharing: row('knowledge', ['giver_id'], 'all'),
   version_entry: row('knowledge', [], []),

@@ -43,6 +43,7 @@ export const texts = {
     'notice-removed': '{{actor}} took a notice of the weather service down.',
     'rain-written': '{{actor}} wrote down the rain of a day.',
     'rain-removed': '{{actor}} took the rain of a day out again.',
+    'words-changed': '{{actor}} changed the village’s words for {{list}}.',
     'sign-added': '{{actor}} added the sign {{subject}}.',
     'sign-changed': '{{actor}} changed the sign {{subject}}.',
     'sign-taken-out': '{{actor}} took the sign {{subject}} out of the list.',
@@ -133,6 +134,7 @@ export const texts = {
     'not-for-the-board': 'not for the board',
     'not-mine-to-say': 'not mine to say',
   },
+  wordList: { kinds: 'kinds of events', operations: 'kinds of work', crops: 'crops' },
   field: {
     name: 'name',
     villageLanguage: 'language of the village',
@@ -155,6 +157,7 @@ export const texts = {
     titleVillage: 'title in the village’s language',
     titleOfficer: 'title',
     kind: 'kind',
+    kindWord: 'what the kind is called',
     icon: 'picture',
     crop: 'crop',
     notes: 'notes',

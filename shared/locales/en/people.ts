@@ -6,6 +6,7 @@ export const texts = {
     places: 'Places',
     figures: 'Figures',
     signs: 'Signs',
+    words: 'Words',
     groups: 'Groups',
     asking: 'To ask',
     consents: 'Consents',

@@ -29,6 +29,7 @@ export function auditSentence(t: Words, language: string, event: AuditEvent): st
     reason:
       details['reason'] === 'elder-asked' ? t('audit:reason.elder-asked') : t('audit:reason.taken-back'),
     state: isConsentState(details['state']) ? t(`audit:consent.${details['state']}`) : '',
+    list: isWordList(details['list']) ? t(`audit:wordList.${details['list']}`) : '',
     way: isWay(details['way']) ? t(`audit:way.${details['way']}`) : '',
     why: isCardEnd(details['why']) ? t(`audit:cardEnd.${details['why']}`) : '',
     answer: isAnswer(details['answer']) ? t(`audit:answer.${details['answer']}`) : '',
@@ -63,6 +64,10 @@ function isConsentState(value: unknown): value is keyof typeof texts.consent {
 
 function isCardEnd(value: unknown): value is keyof typeof texts.cardEnd {
   return typeof value === 'string' && value in texts.cardEnd;
+}
+
+function isWordList(value: unknown): value is keyof typeof texts.wordList {
+  return typeof value === 'string' && value in texts.wordList;
 }
 
 function isWay(value: unknown): value is keyof typeof texts.way {

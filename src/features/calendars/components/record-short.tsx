@@ -1,7 +1,8 @@
 import { useTranslation } from 'react-i18next';
-import { OPERATIONS, REPEATS } from '#shared/contracts/event-record.js';
+import { REPEATS } from '#shared/contracts/event-record.js';
 import { SelectField, TextField } from '#src/ui/field.js';
-import { ChoiceField, CountField, LineField } from '#src/ui/said-fields.js';
+import { CountField, LineField } from '#src/ui/said-fields.js';
+import { CropLength, OperationFields } from './record-words.js';
 import { RecordMore, setRecord, type RecordProps } from './record-parts.js';
 
 /** Kind of work, variety and land. */
@@ -15,23 +16,7 @@ export function RecordWhat({ form }: RecordProps) {
   };
   return (
     <RecordMore>
-      <ChoiceField
-        label={t('operation.label')}
-        nothing={t('choose')}
-        options={OPERATIONS}
-        words={(operation) => t(`operation.${operation}`)}
-        value={what.operation}
-        problem={at('operation')}
-        onChange={(operation) => setRecord(form, 'what', { operation })}
-      />
-      {what.operation === 'other' && (
-        <LineField
-          label={t('ownOperation')}
-          value={what.ownOperation}
-          problem={at('ownOperation')}
-          onChange={(ownOperation) => setRecord(form, 'what', { ownOperation })}
-        />
-      )}
+      <OperationFields form={form} />
       <LineField
         label={t('varietyName')}
         value={variety.name}
@@ -58,6 +43,7 @@ export function RecordWhat({ form }: RecordProps) {
           }}
         />
       </div>
+      <CropLength form={form} />
       <LineField
         label={t('land')}
         hint={t('landHint')}

@@ -43,7 +43,7 @@ export function UnitValue({
   const sharing = useSharingWords();
   switch (unit) {
     case 'kind':
-      return t(`kind.${content.kind}`);
+      return content.kindWord?.word ?? t(`kind.${content.kind}`);
     case 'icon':
       return (
         <span className="inline-flex items-center gap-2">

@@ -1,9 +1,8 @@
 import { useTranslation } from 'react-i18next';
-import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
 import { More } from '#src/ui/fold.js';
-import { SelectField, TextAreaField, TextField } from '#src/ui/field.js';
+import { TextAreaField, TextField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
-import { IconField } from './icon-field.js';
+import { KindFields } from './kind-fields.js';
 
 /** What is done: its name in both languages, its kind and picture, crop, notes and caution. */
 export function WhatFields({ form }: { form: FormState }) {
@@ -52,40 +51,6 @@ export function WhatFields({ form }: { form: FormState }) {
         <CautionField form={form} />
       )}
     </div>
-  );
-}
-
-function KindFields({ form }: { form: FormState }) {
-  const { t } = useTranslation('calendars');
-  const { draft, change, at } = form;
-  return (
-    <>
-      <div className="grid gap-4 @min-[34rem]:grid-cols-2">
-        <SelectField
-          label={t('form.kind')}
-          value={draft.kind}
-          problem={at('kind')}
-          onChange={(event) => {
-            change({ kind: event.currentTarget.value as EntryKind });
-          }}
-        >
-          {ENTRY_KINDS.map((kind) => (
-            <option key={kind} value={kind}>
-              {t(`kind.${kind}`)}
-            </option>
-          ))}
-        </SelectField>
-        <TextField
-          label={t('form.crop')}
-          value={draft.crop}
-          problem={at('crop')}
-          onChange={(event) => {
-            change({ crop: event.currentTarget.value });
-          }}
-        />
-      </div>
-      <IconField form={form} />
-    </>
   );
 }
 

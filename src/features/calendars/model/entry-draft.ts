@@ -78,8 +78,8 @@ export function hasSign({ spec }: EntryDraft['sky']): boolean {
 
 /** What would be saved. It may still be incomplete; the contract's schema says where. */
 export function contentOf(draft: EntryDraft): EntryInput {
-  const { leadType, marker, sky, fixed, seen, nature, anchor, lastDate, sharing, giverId, record, ...rest } =
-    draft;
+  const { leadType, marker, sky, fixed, seen, nature, anchor, lastDate, ...said } = draft;
+  const { sharing, giverId, record, kindWord, ...rest } = said;
   const leads: Record<EntryLead['type'], EntryLead> = {
     marker: { type: 'marker', ...marker },
     sky: { type: 'sky', ...sky },
@@ -96,6 +96,7 @@ export function contentOf(draft: EntryDraft): EntryInput {
     // Left out where they say nothing, so that older texts and their hashes stay as they are.
     ...(sharing && !sameJson(sharing, PLAIN_DETAILS) ? { sharing } : {}),
     ...(giverId ? { giverId } : {}),
+    ...(kindWord ? { kindWord } : {}),
     ...(sameJson(record, EMPTY_RECORD) ? {} : { record }),
   };
 }

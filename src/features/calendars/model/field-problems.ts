@@ -32,7 +32,17 @@ export type FieldGroup = 'what' | 'when' | 'signs' | 'work' | 'trust' | 'whose';
 
 /** Beginnings of the fields' paths. */
 const GROUPS: Record<FieldGroup, readonly string[]> = {
-  what: ['titleVillage', 'titleOfficer', 'kind', 'icon', 'crop', 'notes', 'caution', 'record.what'],
+  what: [
+    'titleVillage',
+    'titleOfficer',
+    'kind',
+    'kindWord',
+    'icon',
+    'crop',
+    'notes',
+    'caution',
+    'record.what',
+  ],
   when: ['board', 'lead', 'offsets', 'hasLastDate', 'lastDate', 'protectiveWatch', 'record.when'],
   signs: ['otherSigns', 'record.signs'],
   work: ['ifLate', 'record.work'],

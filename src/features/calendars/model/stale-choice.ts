@@ -9,7 +9,7 @@ import { sameJson } from '#shared/kernel/canonical-json.js';
 export const UNITS = {
   titleOfficer: ['titleOfficer'],
   titleVillage: ['titleVillage'],
-  kind: ['kind'],
+  kind: ['kind', 'kindWord'],
   icon: ['icon'],
   crop: ['crop'],
   notes: ['notes'],

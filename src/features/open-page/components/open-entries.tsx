@@ -42,7 +42,7 @@ function Entry({ entry, markers, year }: { entry: OpenEntry } & Omit<OpenEntries
         <strong>{window ? words.window(entry, window, year) : t('open:noDay')}</strong>
       </p>
       {window && <p>{words.windowSentence(window)}</p>}
-      <p className="text-small">{t(`calendars:kind.${kind}`)}</p>
+      <p className="text-small">{entry.kindWord ?? t(`calendars:kind.${kind}`)}</p>
       {star && names && (
         <p>
           {t('open:goesBy', { star: markerName(names), phenomenon: t(`sky:phenomenon.${star.phenomenon}`) })}

@@ -18,6 +18,7 @@ export function VillageTabs() {
         { to: paths.villagePlaces(), label: t('tabs.places') },
         { to: paths.villageFigures(), label: t('tabs.figures') },
         { to: paths.villageSigns(), label: t('tabs.signs') },
+        { to: paths.villageWords(), label: t('tabs.words') },
         ...(inner ? [{ to: paths.villagePeople(), label: t('tabs.people') }] : []),
         { to: paths.villageGroups(), label: t('tabs.groups') },
         ...(is('steward', 'officer') ? [{ to: paths.villageAsking(), label: t('tabs.asking') }] : []),

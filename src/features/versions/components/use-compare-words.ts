@@ -29,7 +29,7 @@ export function useCompareWords(year: number, markers: NamesByKey): CompareWords
       },
       lastDate: ({ date, source }) =>
         t('stale.lastDateIs', { day: dates.day({ year: PLAIN_YEAR, ...date }), source }),
-      kind: (kind) => t(`kind.${kind}`),
+      kind: ({ kind, kindWord }) => kindWord?.word ?? t(`kind.${kind}`),
       icon: (icon) => t(`icon.${icon}`),
       level: (level) => t(`sharing:level.${level}.name`),
     }),

@@ -29,7 +29,7 @@ export function useFieldValue(words: CompareWords): (field: ShownField, body: Ve
       case 'lastDate':
         return content.lastDate ? words.lastDate(content.lastDate) : '';
       case 'kind':
-        return words.kind(content.kind);
+        return words.kind(content);
       case 'icon':
         return words.icon(content.icon);
       case 'giver':

@@ -8,6 +8,7 @@ const WORD_FIELDS = new Set([
   'titleVillage',
   'titleOfficer',
   'kind',
+  'kindWord',
   'icon',
   'crop',
   'notes',

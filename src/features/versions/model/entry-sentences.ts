@@ -65,7 +65,7 @@ export interface CompareWords {
   /** The star or sign alone, without its phenomenon. */
   signName: (lead: Extract<EntryLead, { type: 'marker' | 'marker-as-seen' | 'sky' }>) => string;
   lastDate: (lastDate: FixedLastDate) => string;
-  kind: (kind: EntryInput['kind']) => string;
+  kind: (content: Pick<EntryInput, 'kind' | 'kindWord'>) => string;
   icon: (icon: EntryInput['icon']) => string;
   level: (level: EntryInput['sharingLevel']) => string;
 }
@@ -193,7 +193,7 @@ function wordSentences(before: EntryInput, after: EntryInput, words: CompareWord
     const change = before[field] === '' ? 'added' : after[field] === '' ? 'removed' : 'changed';
     tell(`sentence.${field}.${change}`, before[field], after[field]);
   }
-  tell('sentence.kind', words.kind(before.kind), words.kind(after.kind));
+  tell('sentence.kind', words.kind(before), words.kind(after));
   tell('sentence.icon', words.icon(before.icon), words.icon(after.icon));
   tell('sentence.level', words.level(before.sharingLevel), words.level(after.sharingLevel));
   if (!sameJson(before.record ?? null, after.record ?? null)) {

@@ -18,7 +18,7 @@ const words: CompareWords = {
   lead: (lead) => (lead.type === 'marker' ? lead.markerKey : 'fixed date'),
   signName: (lead) => `<${lead.type === 'sky' ? lead.spec.kind : lead.markerKey}>`,
   lastDate: ({ date, source }) => `${date.day}/${date.month} ${source}`,
-  kind: (kind) => kind,
+  kind: ({ kind, kindWord }) => kindWord?.word ?? kind,
   icon: (icon) => icon,
   level: (level) => level,
 };
