@@ -85,10 +85,8 @@ export async function readDraft(
     figures: await everyVillageFigure(manager, calendar.communityId),
   };
   const words = await knownWords(manager, calendar.communityId);
-  const rows = (await liveEntries(manager, calendar.id)).map((row) => ({
-    ...row,
-    content: inVillageWords(row.content, words),
-  }));
+  const rows = await liveEntries(manager, calendar.id);
+  for (const row of rows) row.content = inVillageWords(row.content, words);
   const dates = sky.datesOf(
     place,
     calendar.year,

@@ -15,9 +15,9 @@ import { SelectField, TickField } from '#src/ui/field.js';
 import { CountField, LineField } from '#src/ui/said-fields.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
+import type { OneListProps } from '../model/one-list.js';
 import { useUsualName } from '../model/usual-names.js';
 import { withWord } from '../model/word-changes.js';
-import type { OneListProps } from './word-lists.js';
 
 interface WordFormProps extends OneListProps {
   word: ListedWord;

@@ -3,12 +3,7 @@ import { Plus } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
-import {
-  WORD_LISTS,
-  type ListedWord,
-  type WordList,
-  type WordListName,
-} from '#shared/contracts/word-lists.js';
+import { WORD_LISTS, type ListedWord } from '#shared/contracts/word-lists.js';
 import { useCurrentCommunity, useRoles } from '#src/lib/community.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { wordListsQuery } from '#src/lib/word-lists.js';
@@ -17,6 +12,7 @@ import { Dialog } from '#src/ui/dialog.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Board } from '#src/ui/surfaces.js';
 import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import type { OneListProps } from '../model/one-list.js';
 import { NEW_WORD } from '../model/word-changes.js';
 import { WordForm } from './word-form.js';
 import { WordRows } from './word-rows.js';
@@ -54,13 +50,6 @@ export function WordLists() {
       )}
     </div>
   );
-}
-
-export interface OneListProps {
-  communityId: string;
-  list: WordListName;
-  stored: WordList;
-  mayWrite: boolean;
 }
 
 function OneList(props: OneListProps) {

@@ -8,9 +8,9 @@ import { useSaveWords } from '#src/lib/word-lists.js';
 import { Button, IconButton } from '#src/ui/button.js';
 import { Chip } from '#src/ui/chip.js';
 import { useToast } from '#src/ui/toast.js';
+import type { OneListProps } from '../model/one-list.js';
 import { useUsualName } from '../model/usual-names.js';
 import { withMoved } from '../model/word-changes.js';
-import type { OneListProps } from './word-lists.js';
 
 interface WordRowsProps extends OneListProps {
   onChange: (word: ListedWord) => void;
