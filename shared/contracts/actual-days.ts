@@ -40,6 +40,7 @@ export const actualDaysEndpoints = {
     params,
     body: actualDaysInput,
     response: actualDays,
+    countsOnce: true,
   }),
   remove: defineEndpoint({
     id: 'removeActualDays',
@@ -48,5 +49,6 @@ export const actualDaysEndpoints = {
     summary: 'Take back what was written down about when it was done; what hangs on it waits again',
     access: member('calendar', 'officer', 'elder'),
     params,
+    countsOnce: true,
   }),
 } as const;

@@ -84,6 +84,7 @@ export const variantsEndpoints = {
     body: variantInput,
     response: variant,
     status: 201,
+    countsOnce: true,
   }),
   update: defineEndpoint({
     id: 'updateVariant',
@@ -94,6 +95,7 @@ export const variantsEndpoints = {
     params: variantParams,
     body: variantUpdate,
     response: variant,
+    countsOnce: true,
   }),
   remove: defineEndpoint({
     id: 'removeVariant',
@@ -102,5 +104,6 @@ export const variantsEndpoints = {
     summary: 'Take a variant out of the draft; published versions keep it',
     access: member('calendar', 'officer', 'elder'),
     params: variantParams,
+    countsOnce: true,
   }),
 } as const;

@@ -1,4 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
+import { useRef } from 'react';
+import { sameJson } from '#shared/kernel/canonical-json.js';
 import { ApiProblem } from './api-problem.js';
 import { newId } from './new-id.js';
 import { worthRetrying } from './query-client.js';
@@ -31,29 +33,36 @@ export function useKeyedWrite<T, V, C = undefined>({
   onSuccess,
   onError,
 }: KeyedWrite<T, V, C>) {
+  const unheard = useRef<Keyed<V> | null>(null);
   const mutation = useMutation<T, Error, Keyed<V>, C | undefined>({
     mutationFn: ({ value, key }) => write(value, key),
     retry: worthRetrying,
     onMutate: async ({ value }) => (onMutate ? onMutate(value) : undefined),
     onSuccess: (result, { value }) => {
+      unheard.current = null;
       onSuccess(result, value);
     },
-    onError: (_cause, _keyed, before) => {
+    onError: (cause, keyed, before) => {
+      unheard.current = isUnheard(cause) ? keyed : null;
       onError?.(before);
     },
   });
+  // Asked for again because no answer came: it is the same write, and may have been done.
+  const keyed = (value: V): Keyed<V> => {
+    const last = unheard.current;
+    return { value, key: last !== null && sameJson(last.value, value) ? last.key : newId() };
+  };
   return {
     isPending: mutation.isPending,
     error: mutation.error,
     mutate: (value: V, { onSuccess: done, onError: failed }: After<T> = {}) => {
-      mutation.mutate(
-        { value, key: newId() },
-        {
-          onSuccess: (result) => done?.(result),
-          onError: (cause) => failed?.(cause),
-        },
-      );
+      mutation.mutate(keyed(value), {
+        onSuccess: (result) => done?.(result),
+        onError: (cause) => failed?.(cause),
+      });
     },
+    send: (value: V) => mutation.mutateAsync(keyed(value)),
+    /** For whoever keeps keys by themselves. */
     mutateAsync: (value: V, key: string) => mutation.mutateAsync({ value, key }),
   };
 }

@@ -1,7 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Entry } from '#shared/contracts/calendars.js';
-import { ENDPOINTS } from '#shared/contracts/index.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -156,16 +155,4 @@ describe('a key', () => {
     expect(rows).toContain(officer.personId);
     expect(rows).not.toMatch(new RegExp(`Zqword|${key}`, 'u'));
   });
-});
-
-it('every write of the editor counts once', () => {
-  expect(ENDPOINTS.filter(({ countsOnce }) => countsOnce).map(({ id }) => id)).toEqual([
-    'addEntry',
-    'updateEntry',
-    'duplicateEntry',
-    'deleteEntry',
-    'restoreEntry',
-    'reorderEntries',
-    'submitDraft',
-  ]);
 });

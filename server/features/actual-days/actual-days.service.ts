@@ -11,6 +11,7 @@ import type { Clock } from '../../http/context.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { countOnce } from '../calendars/count-once.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { actualDaysOf } from './known-days.service.js';
@@ -36,17 +37,20 @@ export class ActualDaysService {
   ): Promise<ActualDays> {
     return inTransaction(this.dataSource, async (manager) => {
       const calendar = await this.seen(manager, actor, calendarId, entryId);
-      expectNearYear(calendar, 'from', from);
-      if (to !== null) expectNearYear(calendar, 'to', to);
-      await manager.upsert(
-        ActualDateEntity,
-        {
-          ...{ entryId, firstDay: from, lastDay: to, saidBy, plots },
-          ...{ typedBy: actor.person.id, typedAt: this.clock.now() },
-        },
-        ['entryId'],
-      );
-      await this.record(manager, actor, calendarId, entryId, 'actual-days-written');
+      await countOnce(manager, actor, this.clock.now(), async () => {
+        expectNearYear(calendar, 'from', from);
+        if (to !== null) expectNearYear(calendar, 'to', to);
+        await manager.upsert(
+          ActualDateEntity,
+          {
+            ...{ entryId, firstDay: from, lastDay: to, saidBy, plots },
+            ...{ typedBy: actor.person.id, typedAt: this.clock.now() },
+          },
+          ['entryId'],
+        );
+        await this.record(manager, actor, calendarId, entryId, 'actual-days-written');
+        return entryId;
+      });
       const written = (await actualDaysOf(manager, [entryId])).get(entryId);
       if (!written) throw notFound();
       return written;
@@ -56,9 +60,12 @@ export class ActualDaysService {
   async remove(actor: Actor, calendarId: string, entryId: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
       await this.seen(manager, actor, calendarId, entryId);
-      const { affected } = await manager.delete(ActualDateEntity, { entryId });
-      if ((affected ?? 0) === 0) return;
-      await this.record(manager, actor, calendarId, entryId, 'actual-days-removed');
+      await countOnce(manager, actor, this.clock.now(), async () => {
+        const { affected } = await manager.delete(ActualDateEntity, { entryId });
+        if ((affected ?? 0) > 0)
+          await this.record(manager, actor, calendarId, entryId, 'actual-days-removed');
+        return entryId;
+      });
     });
   }
 

@@ -24,7 +24,8 @@ import { insertSharing, lockSharing, sharedById } from '../../policy/sharing.rep
 import { isTighterOrSame } from '#shared/contracts/sharing-tightness.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { lockOpenDraft, readDraft, recordContribution } from '../calendars/draft.service.js';
+import { countOnce } from '../calendars/count-once.service.js';
+import { expectOpen, lockCalendar, readDraft, recordContribution } from '../calendars/draft.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { personNames } from '../people/person-names.service.js';
@@ -50,8 +51,7 @@ export class VariantsService {
   }
 
   async add(actor: Actor, calendarId: string, entryId: string, content: VariantInput): Promise<Variant> {
-    return this.change(calendarId, async (manager, calendar) => {
-      const entry = await this.seenEntry(manager, actor, calendarId, entryId);
+    return this.changeOne(actor, { calendarId, entryId }, async (manager) => {
       await this.expectFits(manager, actor, content, '');
       if (content.giver === '') throw invalidField('giver', 'required');
       if ((await manager.countBy(EntryVariantEntity, { entryId })) >= VARIANTS_MAX) {
@@ -72,7 +72,7 @@ export class VariantsService {
         giverId: content.giverId ?? actor.person.id,
       });
       await this.record(manager, actor, calendarId, entryId, 'variant-added');
-      return this.one(manager, actor, calendar, entry, id);
+      return id;
     });
   }
 
@@ -81,8 +81,7 @@ export class VariantsService {
     { calendarId, entryId, variantId }: { calendarId: string; entryId: string; variantId: string },
     { content: written, version }: VariantUpdate,
   ): Promise<Variant> {
-    return this.change(calendarId, async (manager, calendar) => {
-      const entry = await this.seenEntry(manager, actor, calendarId, entryId);
+    return this.changeOne(actor, { calendarId, entryId }, async (manager, calendar, entry) => {
       const row = await this.own(manager, actor, entryId, variantId);
       if (row.version !== version) {
         throw stale(await this.one(manager, actor, calendar, entry, variantId), written);
@@ -100,25 +99,45 @@ export class VariantsService {
         );
         await this.record(manager, actor, calendarId, entryId, 'variant-changed');
       }
-      return this.one(manager, actor, calendar, entry, variantId);
+      return variantId;
     });
   }
 
   async remove(actor: Actor, calendarId: string, entryId: string, variantId: string): Promise<void> {
-    await this.change(calendarId, async (manager) => {
-      await this.seenEntry(manager, actor, calendarId, entryId);
+    const remove = async (manager: EntityManager) => {
       await this.own(manager, actor, entryId, variantId);
       await manager.delete(EntryVariantEntity, { id: variantId });
       await this.record(manager, actor, calendarId, entryId, 'variant-removed');
+      return variantId;
+    };
+    await this.change(actor, { calendarId, entryId }, remove, () => Promise.resolve());
+  }
+
+  /** A write that came before with the same key is not done again, also where the draft is locked by now. */
+  private change<T>(
+    actor: Actor,
+    { calendarId, entryId }: { calendarId: string; entryId: string },
+    write: (manager: EntityManager, calendar: CalendarEntity, entry: EntryEntity) => Promise<string>,
+    answer: (manager: EntityManager, calendar: CalendarEntity, entry: EntryEntity, id: string) => Promise<T>,
+  ): Promise<T> {
+    return inTransaction(this.dataSource, async (manager) => {
+      const calendar = await lockCalendar(manager, calendarId);
+      const entry = await this.seenEntry(manager, actor, calendarId, entryId);
+      const id = await countOnce(manager, actor, this.clock.now(), () => {
+        expectOpen(calendar);
+        return write(manager, calendar, entry);
+      });
+      return answer(manager, calendar, entry, id);
     });
   }
 
-  private change<T>(
-    calendarId: string,
-    work: (manager: EntityManager, calendar: CalendarEntity) => Promise<T>,
-  ): Promise<T> {
-    return inTransaction(this.dataSource, async (manager) =>
-      work(manager, await lockOpenDraft(manager, calendarId)),
+  private changeOne(
+    actor: Actor,
+    ids: { calendarId: string; entryId: string },
+    write: (manager: EntityManager, calendar: CalendarEntity, entry: EntryEntity) => Promise<string>,
+  ): Promise<Variant> {
+    return this.change(actor, ids, write, (manager, calendar, entry, id) =>
+      this.one(manager, actor, calendar, entry, id),
     );
   }
 

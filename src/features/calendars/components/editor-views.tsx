@@ -164,7 +164,7 @@ function EntryBoard({ editor, saving, actions, form, selected }: ViewParts & { s
   }
   return (
     <EntryForm
-      key={selected.id}
+      key={editor.formKey}
       editor={editor}
       entry={selected}
       form={form}

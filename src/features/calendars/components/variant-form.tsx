@@ -70,7 +70,7 @@ export function VariantForm({ editor, beside, saved, onClose }: VariantFormProps
     setOverall(null);
     if (found.size > 0) return;
     try {
-      await save.mutateAsync({ content, saved });
+      await save.send({ content, saved: saved && { variantId: saved.variantId, version: saved.version } });
       say(t('saved'));
       onClose();
     } catch (cause) {

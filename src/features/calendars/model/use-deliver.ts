@@ -40,6 +40,11 @@ export function useDeliver(calendarId: string, edits: EntryEdits): Deliver {
   };
 
   const send: Deliver['send'] = async (entryId, content, version) => {
+    // Pressed on a page that still shows it as new: it is the saved one that is meant.
+    const born = edits.bornAs(entryId);
+    if (born !== null && version === null) {
+      return sameContent(born.content, content) ? born : send(born.id, content, born.version);
+    }
     const before = edits.sendingOf(entryId);
     if (before === null) return sendAgain(entryId, { key: newId(), content, version });
     if (before.version === version && sameJson(before.content, content)) return sendAgain(entryId, before);

@@ -30,7 +30,7 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
   const markers = useQuery(markersQuery(placeId, year));
   const community = useQuery(communityQuery(communityId));
   const edits = useEntryEdits(id);
-  const selection = useSelection();
+  const selection = useSelection(edits.born);
   const canWrite = (isOfficer || isElder) && !locked;
   const isKeeper = isElder && !isOfficer;
   // A locked draft is shown as it is saved; what was written before waits on this device.
@@ -92,6 +92,8 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
     shown,
     selected,
     newStart,
+    /** Stays the same when a new entry is saved, so that nobody is thrown out of the field they write in. */
+    formKey: [...edits.born].find(([, { id: savedId }]) => savedId === selected?.id)?.[0] ?? selected?.id,
     draft: selected ? draftFor(selected, writing, newStart) : null,
     stale: selected !== null && !edit?.sending && isStale(selected.saved, edit),
     orphans: canWrite && entries.isSuccess ? orphans(saved, writing) : [],

@@ -14,8 +14,14 @@ export const NO_EDITS: Edits = new Map();
 /** Some fields of an entry, or how they follow from what stands there now. */
 export type DraftChange = Partial<EntryDraft> | ((draft: EntryDraft) => Partial<EntryDraft>);
 
+/** New entries that are saved by now, by the word that each went by before. */
+export type Born = ReadonlyMap<string, Entry>;
+
 export interface EntryEdits {
   all: Edits;
+  /** A page may go on calling an entry by its word for a moment; what comes under it is meant for the saved one. */
+  born: Born;
+  bornAs: (entryId: string) => Entry | null;
   /** When the writing of an entry was last kept on this device; null where it could not be. */
   keptAt: (entryId: string) => Date | null;
   /** Changes an entry; `from` is what it starts from: the saved entry, or how a new one begins. */
@@ -42,6 +48,8 @@ export function useEntryEdits(calendarId: string): EntryEdits {
   const [unkept, setUnkept] = useState<ReadonlySet<string>>(new Set());
   // Two changes may come before the screen is drawn again; the second must see the first.
   const newest = useRef(all);
+  const [born, setBorn] = useState<Born>(new Map());
+  const newestBorn = useRef(born);
   const pending = useRef(new Map<string, EntryEdit>());
   const timer = useRef<ReturnType<typeof setTimeout> | undefined>(undefined);
 
@@ -89,9 +97,11 @@ export function useEntryEdits(calendarId: string): EntryEdits {
 
   const change = useCallback(
     (entryId: string, from: Entry | EntryDraft, changed: DraftChange) => {
-      const edit = changedEdit(newest.current.get(entryId), from, changed);
-      if (edit === null) drop(entryId);
-      else put(entryId, edit);
+      const saved = newestBorn.current.get(entryId);
+      const id = saved?.id ?? entryId;
+      const edit = changedEdit(newest.current.get(id), saved ?? from, changed);
+      if (edit === null) drop(id);
+      else put(id, edit);
     },
     [put, drop],
   );
@@ -100,6 +110,10 @@ export function useEntryEdits(calendarId: string): EntryEdits {
     (entryId: string, sent: EntryInput, saved: Entry) => {
       const edit = newest.current.get(entryId);
       drop(entryId);
+      if (saved.id !== entryId) {
+        newestBorn.current = new Map(newestBorn.current).set(entryId, saved);
+        setBorn(newestBorn.current);
+      }
       if (!edit || sameContent(contentOf(edit.draft), sent)) return;
       const { sending: _done, ...rest } = edit;
       // An answer that came late may tell of a newer state than the one that was sent.
@@ -126,6 +140,8 @@ export function useEntryEdits(calendarId: string): EntryEdits {
 
   const sendingOf = useCallback((entryId: string) => newest.current.get(entryId)?.sending ?? null, []);
 
+  const bornAs = useCallback((entryId: string) => newestBorn.current.get(entryId) ?? null, []);
+
   const takeIn = useCallback(
     (saved: readonly Entry[]) => {
       for (const entry of saved) {
@@ -144,6 +160,8 @@ export function useEntryEdits(calendarId: string): EntryEdits {
   return useMemo(
     () => ({
       all,
+      born,
+      bornAs,
       keptAt: (entryId) => {
         const edit = all.get(entryId);
         return edit === undefined || unkept.has(entryId) ? null : new Date(edit.keptAt);
@@ -156,7 +174,7 @@ export function useEntryEdits(calendarId: string): EntryEdits {
       sendingOf,
       takeIn,
     }),
-    [all, unkept, change, put, drop, settle, mark, sendingOf, takeIn],
+    [all, born, bornAs, unkept, change, put, drop, settle, mark, sendingOf, takeIn],
   );
 }
 

@@ -93,7 +93,7 @@ export function useSaveEntry(editor: Editor): SaveEntry {
       const saved = await deliver.send(entryId, parsed.data, version);
       setRefused(null);
       setChoosingId(null);
-      if (saved.id !== entryId) selection.open(saved.id);
+      if (saved.id !== entryId && selected?.id === entryId) selection.rename(saved.id);
       say(t('editor.saved', { title: saved.content.titleOfficer }));
       return true;
     } catch (cause) {

@@ -2,24 +2,28 @@ import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { useWideScreen } from '#src/lib/wide-screen.js';
 import { newEntryId } from './kept-edits.js';
+import type { Born } from './use-entry-edits.js';
 import { wantedMarker, type WantedMarker } from './wanted-marker.js';
 
 export interface Selection {
   isWide: boolean;
-  /** As the address says; null for the list. */
+  /** As the address says, and where that names a new entry that is saved by now, the saved one; null for the list. */
   openId: string | null;
   /** What a new entry shall go by, if the address says so. */
   wanted: WantedMarker | null;
   open: (entryId: string) => void;
+  /** The new entry that is open is saved: the address names it from now on, and "back" does not lead to it twice. */
+  rename: (entryId: string) => void;
   openNew: () => void;
   close: () => void;
 }
 
 /** Which entry is open. It stands in the address: on a phone "back" leads from the entry to the list. */
-export function useSelection(): Selection {
+export function useSelection(born: Born): Selection {
   const isWide = useWideScreen();
   const [search, setSearch] = useSearchParams();
-  const openId = search.get('entry');
+  const named = search.get('entry');
+  const openId = named === null ? null : (born.get(named)?.id ?? named);
   const wanted = useMemo(() => wantedMarker(search), [search]);
   const open = useCallback(
     (entryId: string) => {
@@ -32,6 +36,9 @@ export function useSelection(): Selection {
     openId,
     wanted,
     open,
+    rename: (entryId) => {
+      setSearch({ entry: entryId }, { replace: true, preventScrollReset: true });
+    },
     openNew: () => {
       open(newEntryId(Date.now().toString(36)));
     },

@@ -18,7 +18,7 @@ export function useSendAgain({ edits, selection, canWrite }: Editor, { sendAgain
       if (!sending) continue;
       try {
         const saved = await sendAgain(entryId, sending);
-        if (selection.openId === entryId && saved.id !== entryId) selection.open(saved.id);
+        if (selection.openId === entryId && saved.id !== entryId) selection.rename(saved.id);
         say(t('editor.saved', { title: saved.content.titleOfficer }));
       } catch {
         // Kept as it is: the next time, or the person's own save, tells what stands in the way.

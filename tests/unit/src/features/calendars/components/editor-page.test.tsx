@@ -1,10 +1,10 @@
 import { screen, waitFor, within } from '@testing-library/react';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import type { Calendar, Entry, EntryInput } from '#shared/contracts/calendars.js';
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { UPPER_TAZIMEL } from '#server/features/demo/demo-villages.data.js';
-import { answerWith, refusal, type Answers, type Sent } from '#tests/support/answers.js';
-import { CALENDAR, entryOf, tazimelMarkers, YEAR } from '#tests/support/draft-of-tazimel.js';
+import { answerWith, type Sent } from '#tests/support/answers.js';
+import { draftServer } from '#tests/support/draft-server.js';
+import { CALENDAR, tazimelMarkers, YEAR } from '#tests/support/draft-of-tazimel.js';
 import { skySign } from '#tests/support/finder-of-tazimel.js';
 import { OFFICER, renderOnBoard } from '#tests/support/on-board.js';
 import { starTable, TAZIMEL } from '#tests/support/stars-of-tazimel.js';
@@ -13,68 +13,7 @@ import { starTable, TAZIMEL } from '#tests/support/stars-of-tazimel.js';
 vi.setConfig({ testTimeout: 30_000 });
 
 const markers = await tazimelMarkers();
-const table = await starTable(YEAR);
-const calendarPath = `/api/calendars/${CALENDAR.id}`;
-const communityPath = `/api/communities/${CALENDAR.communityId}`;
-const list = (items: readonly unknown[]) => ({ items, nextCursor: null });
-
-interface Saved {
-  calendar: Calendar;
-  entries: Entry[];
-  removed?: Entry;
-}
-
-/** A server that keeps one draft. */
-function server(saved: Saved): Answers {
-  const answers: Record<string, unknown> = {
-    [`GET ${calendarPath}`]: () => saved.calendar,
-    [`GET ${calendarPath}/entries`]: () => ({ ...list(saved.entries), keptCount: 0 }),
-    [`GET ${calendarPath}/versions`]: () => list([]),
-    [`GET ${communityPath}`]: () => ({
-      ...UPPER_TAZIMEL.settings,
-      id: CALENDAR.communityId,
-      signOffRule: { minElders: 1, mustSign: [], oneOf: [], steward: false },
-      version: 1,
-    }),
-    [`GET ${communityPath}/groups`]: () => list([]),
-    [`GET ${communityPath}/people`]: () => list([]),
-    [`GET ${communityPath}/places`]: () => list([TAZIMEL]),
-    [`GET /api/places/${TAZIMEL.id}/stars`]: () => table,
-    [`POST ${calendarPath}/entries`]: ({ body }: Sent) => {
-      const added = entryOf(markers, saved.entries.length + 1, body as EntryInput);
-      saved.entries = [...saved.entries, added];
-      return Response.json(added, { status: 201 });
-    },
-  };
-  for (const { id } of saved.entries) {
-    answers[`PUT ${calendarPath}/entries/${id}`] = ({ body }: Sent) => {
-      const { content, version } = body as { content: EntryInput; version: number };
-      const current = saved.entries.find((entry) => entry.id === id);
-      if (current?.version !== version) return refusal('stale', 409, { current, sent: body });
-      const next = { ...current, content, version: version + 1 };
-      saved.entries = saved.entries.map((entry) => (entry.id === id ? next : entry));
-      return next;
-    };
-    answers[`DELETE ${calendarPath}/entries/${id}`] = () => {
-      const gone = saved.entries.find((entry) => entry.id === id);
-      if (gone) saved.removed = gone;
-      saved.entries = saved.entries.filter((entry) => entry.id !== id);
-      return new Response(null, { status: 204 });
-    };
-    answers[`POST ${calendarPath}/entries/${id}/restore`] = () => {
-      const back = saved.removed;
-      if (back) saved.entries = [back, ...saved.entries];
-      return back;
-    };
-  }
-  return answers;
-}
-
-const draft = (...changes: Partial<EntryInput>[]): Saved => ({
-  calendar: { ...CALENDAR },
-  entries: changes.map((change, index) => entryOf(markers, index + 1, change)),
-});
-
+const { draft, server, communityPath } = draftServer(markers, await starTable(YEAR));
 const open = (search = '', session = OFFICER) =>
   renderOnBoard(
     <EditorPage about={() => null} lockedAction={() => <button type="button">Take it back</button>} />,

@@ -1,0 +1,58 @@
+import { screen, waitFor } from '@testing-library/react';
+import { afterEach, beforeEach, expect, it, vi } from 'vitest';
+import { EditorPage } from '#src/features/calendars/components/editor-page.js';
+import { answerWith, type Sent } from '#tests/support/answers.js';
+import { draftServer } from '#tests/support/draft-server.js';
+import { CALENDAR, tazimelMarkers, YEAR } from '#tests/support/draft-of-tazimel.js';
+import { renderOnBoard } from '#tests/support/on-board.js';
+import { starTable } from '#tests/support/stars-of-tazimel.js';
+
+// Whole screens over a real year of the sky: quick by themselves, slow on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
+
+const { calendarPath, draft, server } = draftServer(await tazimelMarkers(), await starTable(YEAR));
+
+beforeEach(() => {
+  vi.stubGlobal('scrollTo', vi.fn());
+  localStorage.clear();
+  vi.stubGlobal('matchMedia', () => ({
+    matches: true,
+    addEventListener: () => undefined,
+    removeEventListener: () => undefined,
+  }));
+});
+afterEach(() => {
+  vi.unstubAllGlobals();
+});
+
+it('leaves whoever writes on in their field when a new entry comes to be saved, and saves the rest over it', async () => {
+  const answers = server(draft());
+  const post = answers[`POST ${calendarPath}/entries`] as (sent: Sent) => Response;
+  let letThrough: () => void = () => undefined;
+  const log = answerWith({
+    ...answers,
+    [`POST ${calendarPath}/entries`]: async (sent: Sent) => {
+      await new Promise<void>((resolve) => {
+        letThrough = resolve;
+      });
+      return post(sent);
+    },
+  });
+  const { user, address } = await renderOnBoard(<EditorPage about={() => null} lockedAction={() => null} />, {
+    path: `/calendars/${CALENDAR.id}?entry=new-x&marker=hr2491&phenomenon=heliacal-rising`,
+    pattern: '/calendars/:calendarId',
+  });
+  await user.type(await screen.findByLabelText(/Name of the work or rite/), 'First weeding');
+  await user.click(screen.getByRole('button', { name: 'Save the entry' }));
+  const crop = screen.getByLabelText<HTMLInputElement>('Crop or variety');
+  await user.type(crop, 'bea');
+  letThrough();
+  await screen.findByText('Saved: First weeding.');
+  await waitFor(() => {
+    expect(address()).toMatch(/entry=0190a3a0/u);
+  });
+  await user.keyboard('ns');
+  expect(document.activeElement).toBe(crop);
+  expect(crop.value).toBe('beans');
+  expect(log.filter(({ method }) => method === 'POST')).toHaveLength(1);
+});
