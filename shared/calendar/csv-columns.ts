@@ -1,5 +1,7 @@
 /**
- * How a calendar stands in a table: one line an entry, under one line of titles. Whoever writes such a file and whoever
+ * How a calendar stands in a table: one line an entry, and behind it one for each other keeper's timing of it, under one
+ * line of titles. Every line has a number, by which others of the same table name it: `leadEntry` the entry from which days
+ * are counted, `variantOf` the entry whose timing this is, `boardVariant` the timing that drives the board. Whoever writes such a file and whoever
  * reads one go by this list; titles are words of a language (`files`, `calendarCsv.column.<id>`), ids never change.
  *
  * - `text`: words as they are; what a spreadsheet would run as a formula has an apostrophe in front (`csvText` puts it
@@ -28,6 +30,7 @@ const column = <Id extends string>(id: Id, kind: CsvColumnKind, part: CsvColumnP
 });
 
 export const CALENDAR_CSV_COLUMNS = [
+  column('number', 'whole-number'),
   column('titleVillage', 'text'),
   column('titleOfficer', 'text'),
   column('kind', 'code'),
@@ -47,6 +50,10 @@ export const CALENDAR_CSV_COLUMNS = [
   column('leadDate', 'month-day'),
   column('leadSource', 'text'),
   column('leadOther', 'json'),
+  column('leadEntry', 'whole-number'),
+  column('leadDay', 'code'),
+  column('usualFrom', 'month-day'),
+  column('usualTo', 'month-day'),
   column('earliestDays', 'whole-number'),
   column('bestFromDays', 'whole-number'),
   column('bestToDays', 'whole-number'),
@@ -59,6 +66,13 @@ export const CALENDAR_CSV_COLUMNS = [
   column('caution', 'text'),
   column('notes', 'text'),
   column('giver', 'text'),
+  column('variantOf', 'whole-number'),
+  column('variantDifference', 'code'),
+  column('variantConfidence', 'code'),
+  column('variantBasis', 'code'),
+  column('boardShows', 'code'),
+  column('boardVariant', 'whole-number'),
+  column('boardReason', 'text'),
   column('level', 'code', 'about'),
   column('year', 'whole-number', 'about'),
   column('place', 'text', 'about'),

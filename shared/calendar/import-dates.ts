@@ -1,6 +1,8 @@
 import { daysInMonth } from '#shared/kernel/iso-date.js';
 import type { Phenomenon } from '#shared/sky/index.js';
 import type { MonthDay } from './entry-model.js';
+import { saidBy, type ImportPhrase } from './import-phrases.js';
+import { signOfPhrase, type ImportSignProblem, type NamedSign } from './import-signs.js';
 
 /** Words of one language by which a table may name days; all of them are compared without case. */
 export interface ImportWords {
@@ -10,13 +12,15 @@ export interface ImportWords {
   phenomena: Readonly<Record<Phenomenon, readonly string[]>>;
   /** Before a day of the civil year, such as `Fixed date: 07-05`. */
   fixedDate: readonly string[];
+  /** Ways to name signs beyond a star's first and last days, and days of other entries. */
+  phrases: readonly ImportPhrase[];
 }
 
 /** How `6/7` is meant; null while nobody has said so. */
 export type DayOrder = 'day-first' | 'month-first' | null;
 
 export type ImportDateProblem =
-  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | 'unknown-star-name' | 'unknown-sign-words';
+  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | ImportSignProblem;
 
 /** What one cell says. A ten-day part has a first and a last day; every other day is both. */
 export type DateCell =
@@ -26,10 +30,6 @@ export type DateCell =
   | { kind: 'sign'; sign: NamedSign; offsetDays: number }
   | { kind: 'problem'; problem: ImportDateProblem };
 
-/** A sign that a cell names, as the village knows it. */
-export type NamedSign =
-  { type: 'star'; markerKey: string; phenomenon: Phenomenon } | { type: 'other'; signKey: string };
-
 export interface ImportDateFacts {
   words: ImportWords;
   dayOrder: DayOrder;
@@ -37,8 +37,9 @@ export interface ImportDateFacts {
   calendarYear: number;
   /** Stars and figures by their names as `plainWords` writes them. */
   markerKeyOf: ReadonlyMap<string, string>;
-  /** Other signs of the sky by their names, with a key that whoever asks understands. */
-  signKeyOf: ReadonlyMap<string, string>;
+  /** Signs of nature by their names as `plainWords` writes them: the village's own, and what somebody said is one. */
+  natureSigns: ReadonlyMap<string, string>;
+  latitudeDeg: number;
 }
 
 const ISO = /^(\d{4})-(\d{1,2})-(\d{1,2})$/u;
@@ -49,21 +50,28 @@ const DAY_THEN_WORD = /^(\d{1,2})\.?\s+(\p{L}+)\.?(?:\s+(\d{4}))?$/u;
 const WORD_THEN_DAY = /^(\p{L}+)\.?\s+(\d{1,2})(?:,?\s+(\d{4}))?$/u;
 const TEN_DAYS_OF_YEAR = /^d\s?(\d{1,2})$/u;
 const OFFSET = /^(.*?)\s*([+\-−])\s*(\d{1,3})$/u;
+/** With a space before it: `A-04` is a number of a line. */
+const OFFSET_APART = /^(.*\S)\s+([+\-−])\s*(\d{1,3})$/u;
+/** Longer than any sign is called; what is longer is not held against all that a sign may be called. */
+const SIGN_WORDS_MAX = 300;
 const TEN_DAY_PARTS = 3;
 const TEN_DAY_PARTS_OF_YEAR = 36;
 const ONLY_SLASH_MONTHS = 12;
 
 /**
  * Reads one cell of a table as a day: `2027-06-14`, `06-14`, `14.6.`, `14/6`, `14 June`, `June 14`; as a ten-day part,
- * `June 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign, `Pleiades first morning +7`. A month's
- * name with 1, 2 or 3 behind it is always a ten-day part; the second of June is `2 June`.
+ * `June 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign, `Pleiades first morning +7`, `Belt due
+ * south at 21:00`, `actual date of A04 +19`. A month's name with 1, 2 or 3 behind it is always a ten-day part; the second
+ * of June is `2 June`.
  *
  * @returns what the cell says, or what is the matter with it; never throws
  */
 export function dateCell(text: string, facts: ImportDateFacts): DateCell {
   const words = plainWords(text);
   if (words === '') return { kind: 'empty' };
-  return dayCell(withoutFixed(words, facts.words), facts) ?? signCell(words, facts);
+  return (
+    dayCell(withoutFixed(words, facts.words), facts) ?? signCell(text.replace(/\s+/gu, ' ').trim(), facts)
+  );
 }
 
 /** Words as they are compared: composed, small, one space between, no article before. */
@@ -143,15 +151,44 @@ function tenDayPart(number: number): DateCell {
   return { kind: 'day', first: { month, day: part * 10 + 1 }, last: { month, day: lastDay }, year: null };
 }
 
-function signCell(
-  words: string,
-  { words: { phenomena }, markerKeyOf, signKeyOf }: ImportDateFacts,
+function signCell(text: string, facts: ImportDateFacts): DateCell {
+  if (text.length > SIGN_WORDS_MAX) return { kind: 'problem', problem: 'unknown-sign-words' };
+  const apart = offsetBehind(OFFSET_APART, text);
+  for (const { name, offsetDays } of [apart, { name: text, offsetDays: 0 }]) {
+    const said = saidBy(name, facts.words.phrases);
+    if (said === null) continue;
+    const sign = signOfPhrase(said, {
+      markerKeyOf: (star) => facts.markerKeyOf.get(plainWords(star)),
+      phenomenonOf: (called) => phenomenonOf(plainWords(called), facts.words),
+      latitudeDeg: facts.latitudeDeg,
+    });
+    if ('problem' in sign) return { kind: 'problem', problem: sign.problem };
+    return { kind: 'sign', sign, offsetDays };
+  }
+  const { name, offsetDays } = offsetBehind(OFFSET, text);
+  const nature = facts.natureSigns.get(plainWords(name));
+  if (nature !== undefined) return { kind: 'sign', sign: { type: 'nature', name: nature }, offsetDays };
+  return starCell(plainWords(name), offsetDays, facts);
+}
+
+function offsetBehind(pattern: RegExp, text: string): { name: string; offsetDays: number } {
+  const parts = pattern.exec(text);
+  if (!parts) return { name: text, offsetDays: 0 };
+  return { name: parts[1] ?? '', offsetDays: (parts[2] === '+' ? 1 : -1) * Number(parts[3]) };
+}
+
+function phenomenonOf(name: string, { phenomena }: ImportWords): Phenomenon | undefined {
+  const found = Object.entries(phenomena).find(([, names]) =>
+    names.some((each) => plainWords(each) === name),
+  );
+  return found?.[0] as Phenomenon | undefined;
+}
+
+function starCell(
+  name: string,
+  offsetDays: number,
+  { words: { phenomena }, markerKeyOf }: ImportDateFacts,
 ): DateCell {
-  const parts = OFFSET.exec(words);
-  const name = parts?.[1] ?? words;
-  const offsetDays = parts ? (parts[2] === '+' ? 1 : -1) * Number(parts[3]) : 0;
-  const signKey = signKeyOf.get(name);
-  if (signKey !== undefined) return { kind: 'sign', sign: { type: 'other', signKey }, offsetDays };
   // The longest ending first: "first morning setting" is not "first morning" of something called so.
   const endings = Object.entries(phenomena)
     .flatMap(([phenomenon, names]) => names.map((each) => ({ phenomenon, ending: plainWords(each) })))

@@ -1,6 +1,8 @@
+import { sameJson } from '#shared/kernel/canonical-json.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
 import type { EntryOffsets, MonthDay } from './entry-model.js';
-import type { DateCell, ImportDateProblem, NamedSign } from './import-dates.js';
+import type { DateCell, ImportDateProblem } from './import-dates.js';
+import type { NamedSign } from './import-signs.js';
 
 /** The columns of a line that say when. */
 export const WINDOW_DAYS = ['earliest', 'bestFrom', 'bestTo', 'lastAdvised'] as const;
@@ -38,7 +40,7 @@ export function windowOfCells({ when, days, offsetsDays }: WindowCells): WindowR
   const named = all.flatMap(([column, cell]) => (cell.kind === 'sign' ? [{ column, ...cell }] : []));
   const [first] = named;
   if (first === undefined) return byDays(when, days, offsetsDays);
-  const other = named.find(({ sign }) => !sameSign(sign, first.sign));
+  const other = named.find(({ sign }) => !sameJson(sign, first.sign));
   if (other) return { problems: [{ column: other.column, problem: 'mixed-dates' }] };
   return bySign(first.sign, when, days, offsetsDays);
 }
@@ -128,11 +130,4 @@ function forward(from: MonthDay, to: MonthDay): number {
 
 function numberOf({ month, day }: MonthDay): number {
   return dayNumberOf(1, month, day);
-}
-
-function sameSign(one: NamedSign, other: NamedSign): boolean {
-  if (one.type === 'star' && other.type === 'star') {
-    return one.markerKey === other.markerKey && one.phenomenon === other.phenomenon;
-  }
-  return one.type === 'other' && other.type === 'other' && one.signKey === other.signKey;
 }

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { CALENDAR_FILE_MAX_BYTES } from './calendar-file.js';
-import { entryWarning, entryWindow } from './calendars.js';
+import { entryLead, entryWarning, entryWindow } from './calendars.js';
 import { id } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 
@@ -19,6 +19,7 @@ export type FileImport = z.infer<typeof fileImport>;
 
 /** Columns that a table may have: those of the CSV that make an entry, and plainer ones for tables of other hands. */
 export const IMPORT_COLUMNS = [
+  'number',
   'titleVillage',
   'titleOfficer',
   'kind',
@@ -41,6 +42,10 @@ export const IMPORT_COLUMNS = [
   'leadDate',
   'leadSource',
   'leadOther',
+  'leadEntry',
+  'leadDay',
+  'usualFrom',
+  'usualTo',
   'lastDate',
   'lastDateSource',
   'protectiveWatch',
@@ -49,6 +54,13 @@ export const IMPORT_COLUMNS = [
   'caution',
   'notes',
   'giver',
+  'variantOf',
+  'variantDifference',
+  'variantConfidence',
+  'variantBasis',
+  'boardShows',
+  'boardVariant',
+  'boardReason',
 ] as const;
 export type ImportColumn = (typeof IMPORT_COLUMNS)[number];
 
@@ -67,6 +79,8 @@ export const tableInput = z.strictObject({
   dryRun: z.boolean(),
   /** How `6/7` is meant; null where the table has no such days, or nobody has said so yet. */
   dayOrder: z.enum(['day-first', 'month-first']).nullable(),
+  /** Words of this table that somebody said are signs of nature: no list knows them. */
+  natureSigns: z.array(z.string().max(CELL_MAX, 'too-long')).max(IMPORT_LINES_MAX, 'too-many'),
   lines: z.array(tableLine).min(1).max(IMPORT_LINES_MAX, 'too-many'),
 });
 export type TableInput = z.infer<typeof tableInput>;
@@ -76,6 +90,8 @@ export const readLine = z.strictObject({
   line: z.number().int(),
   title: z.string(),
   protectiveWatch: z.boolean(),
+  /** What it goes by, as the words of the line were understood; null where something is the matter. */
+  lead: entryLead.nullable(),
   /** Null where something is the matter, or the sign has no day in this year. */
   window: entryWindow.nullable(),
   warnings: z.array(entryWarning),
@@ -83,7 +99,11 @@ export const readLine = z.strictObject({
 });
 export type ReadLine = z.infer<typeof readLine>;
 
-export const tableImport = z.strictObject({ added: z.number().int(), lines: z.array(readLine) });
+export const tableImport = z.strictObject({
+  /** Entries, each with the other timings beside it. */
+  added: z.number().int(),
+  lines: z.array(readLine),
+});
 export type TableImport = z.infer<typeof tableImport>;
 
 /** What copying changed in an entry, because the other village is another one. */

@@ -1,15 +1,21 @@
 import { randomUUID } from 'node:crypto';
 import { readFileSync } from 'node:fs';
+import Papa from 'papaparse';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { ImportColumn, TableImport, TableInput, TableLine } from '#shared/contracts/imports.js';
+import type { TableImport, TableInput, TableLine } from '#shared/contracts/imports.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import { CalendarEntity } from '#server/db/entities/calendar.entity.js';
+import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
+import { daysBetween } from '#shared/kernel/iso-date.js';
 import { en } from '#shared/locales/index.js';
+import { columnWordsOf } from '#src/features/imports/model/column-words.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
 import { readTable } from '#src/features/imports/model/read-table.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
   beginCalendar,
+  changePlace,
   entriesOf,
   openVillage,
   reasonOf,
@@ -17,6 +23,7 @@ import {
   takeBack,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addVariant } from '#tests/support/variant-api.js';
 
 /** Lines of somebody's table, as entries of a draft. */
 let api: TestApi;
@@ -35,7 +42,7 @@ const SOW = {
   ...{ bestFromDays: '7', bestToDays: '23' },
 };
 const input = (lines: TableLine[], changes: Partial<TableInput> = {}): TableInput => ({
-  ...{ key: randomUUID(), dryRun: false, dayOrder: null, lines },
+  ...{ key: randomUUID(), dryRun: false, dayOrder: null, natureSigns: [], lines },
   ...changes,
 });
 const send = (calendarId: string, body: TableInput, client: Client = village.officer) =>
@@ -43,10 +50,7 @@ const send = (calendarId: string, body: TableInput, client: Client = village.off
 const sent = async (calendarId: string, body: TableInput) =>
   (await send(calendarId, body).expect(200)).body as TableImport;
 
-const titlesOf = (column: ImportColumn) => [
-  column === 'when' ? en.imports.column.when : en.files.calendarCsv.column[column],
-  ...en.imports.alias[column].split('|'),
-];
+const { titlesOf } = columnWordsOf([en]);
 const linesOf = (text: string) => {
   const table = readTable(text);
   return matchedLines(table, guessColumns(table.titles, titlesOf));
@@ -160,38 +164,69 @@ describe('a table', () => {
 
 /** `tests/fixtures/demo/demo-events.csv`, a table of another hand, matched by its titles alone. */
 describe('the table of the demo', () => {
-  const DEMO = readFileSync(new URL('../fixtures/demo/demo-events.csv', import.meta.url), 'utf8');
+  const DEMO = linesOf(readFileSync(new URL('../fixtures/demo/demo-events.csv', import.meta.url), 'utf8'));
+  const BIRCH = 'Birch leaf the size of a thumbnail';
+  const of = (letter: string) => DEMO.filter(({ cells }) => (cells.number ?? '').startsWith(letter));
+  /** As the village is whose lines they are: spring comes in another month on the other side of the Earth. */
+  const at = async (latitudeDeg: number) => {
+    await changePlace(api, village.placeId, { latitudeDeg });
+    return begin();
+  };
+  const refusedOf = ({ lines }: TableImport) =>
+    lines
+      .filter(({ problems }) => problems.length > 0)
+      .map(({ title, problems }) => [title, problems.map(({ code }) => code).join()]);
+  afterAll(() => changePlace(api, village.placeId, { latitudeDeg: 12 }));
 
-  it('comes in but for the lines whose anchors no table can say; those are named with the reason', async () => {
-    const calendarId = await begin();
-    const lines = linesOf(DEMO);
-    const read = await sent(calendarId, input(lines, { dryRun: true }));
-    const refused = read.lines.filter(({ problems }) => problems.length > 0);
-    expect(refused.map(({ title, problems }) => [title, problems.map(({ code }) => code).join()])).toEqual([
-      // What was really done, in this year and by somebody.
-      ['First weeding', 'unknown-sign-words'],
-      ['Second weeding', 'unknown-sign-words'],
-      ['Earthing-up', 'unknown-sign-words'],
-      // The Sun over a ridge and a star due south at an hour are set up in the editor.
-      ['Sun back over the south ridge', 'unknown-sign-words'],
-      ['Three-in-a-row due south at nine in the evening', 'unknown-sign-words'],
-      ['Order seed potato and oats', 'unknown-sign-words'],
-      // Spring comes in March or in September; midsummer is no one day.
-      ['Chit seed potato', 'unknown-sign-words'],
+  it('comes in but for three lines that do not say which work they count from, and one that goes by a log', async () => {
+    const tazimel = await at(12);
+    const vardesca = await at(-14);
+    const tholmere = await at(66);
+    const look = (calendarId: string, letter: string, natureSigns: string[] = []) =>
+      sent(calendarId, input(of(letter), { dryRun: true, natureSigns }));
+    // There are two sowings and three plantings in the table.
+    expect(refusedOf(await look(tazimel, 'A'))).toEqual([
+      ['First weeding', 'which-entry'],
+      ['Second weeding', 'which-entry'],
+    ]);
+    expect(refusedOf(await look(vardesca, 'B'))).toEqual([['Earthing-up', 'which-entry']]);
+    // No list knows these words until somebody says that a leaf is a sign of nature; a log and a notice are none.
+    expect(refusedOf(await look(tholmere, 'C'))).toEqual([
       ['Stop using the ice road', 'unknown-sign-words'],
-      ['Net and boat overhaul', 'unknown-sign-words'],
-      // Birch leaves have no usual days in the table.
       ['Sow oats and fodder', 'unknown-sign-words'],
       ['Plant potato', 'unknown-sign-words'],
-      ['Hay', 'unknown-sign-words'],
-      ['First star again', 'unknown-sign-words'],
-      ['Berry week', 'unknown-sign-words'],
-      ['Lift potato before frost', 'unknown-sign-words'],
     ]);
-    expect(read.added).toBe(lines.length - refused.length);
-    const gone = new Set(refused.map((each) => each.line));
-    const rest = lines.filter((each) => !gone.has(each.line));
-    expect((await sent(calendarId, input(rest))).added).toBe(rest.length);
+    const north = await look(tholmere, 'C', [BIRCH]);
+    expect(refusedOf(north)).toEqual([['Stop using the ice road', 'unknown-sign-words']]);
+    expect(north.lines.map(({ lead }) => lead && ('spec' in lead ? lead.spec : lead.type))).toEqual([
+      { kind: 'noon-sun', passage: 'back', ridgeName: '2-degree ridge' },
+      { kind: 'due-meridian', markerKey: 'orion-belt', facing: 'south', solarHour: 21 },
+      { kind: 'due-meridian', markerKey: 'orion-belt', facing: 'south', solarHour: 21 },
+      { kind: 'sun-season', season: 'march-equinox' },
+      null,
+      { kind: 'dark-night', end: 'last', depthDeg: 6 },
+      ...['nature-sign', 'nature-sign'],
+      { kind: 'sun-season', season: 'june-solstice' },
+      { kind: 'dark-night', end: 'first', depthDeg: 6 },
+      { kind: 'dark-night', end: 'first', depthDeg: 6 },
+      { kind: 'dark-night', end: 'first', depthDeg: 15 },
+      'marker',
+    ]);
+    expect(north.lines.find(({ title }) => title === 'Plant potato')?.lead).toMatchObject({
+      name: BIRCH,
+      // The best days less as many days as they come after the leaf: 30 May less five, 12 June less eighteen.
+      usual: { from: { month: 5, day: 25 }, to: { month: 5, day: 25 } },
+    });
+  });
+
+  it('comes in whole once each line says from which work it is counted', async () => {
+    const calendarId = await at(12);
+    const lines = of('A').map((each) =>
+      each.cells.when === 'Actual sowing date'
+        ? line({ ...each.cells, when: 'actual date of A04' }, each.line)
+        : each,
+    );
+    expect((await sent(calendarId, input(lines))).added).toBe(lines.length);
     const seen = await entriesOf(village.elder, calendarId);
     const sow = seen.find(({ content }) => content.titleOfficer === 'Sow long millet');
     expect(sow?.content).toMatchObject({
@@ -201,9 +236,86 @@ describe('the table of the demo', () => {
       offsets: { earliestDays: 3, bestFromDays: 7, bestToDays: 23, lastAdvisedDays: 28 },
       otherSigns: 'Soil wet to a hand depth; weaver birds building; fig tree in new leaf',
     });
-    const frost = seen.find(({ content }) => content.titleOfficer === 'Frost watch');
-    expect(frost?.content.offsets).toEqual({
-      ...{ earliestDays: -12, bestFromDays: -8, bestToDays: 77, lastAdvisedDays: 87 },
+    const weed = seen.find(({ content }) => content.titleOfficer === 'First weeding');
+    expect(weed?.content.lead).toEqual({ type: 'entry-actual', entryId: sow?.id });
+    expect(weed?.dates.warnings).toContain('waits-for-actual-day');
+  });
+});
+
+describe('a line that counts from other work', () => {
+  const SPREAD = { ...SOW, titleOfficer: 'Spread', number: '1' };
+  const after = (when: string) => ({ ...SOW, titleOfficer: 'After it', when });
+  const codesOf = async (calendarId: string, lines: TableLine[]) =>
+    (await sent(calendarId, input(lines, { dryRun: true }))).lines.map(({ problems }) =>
+      problems.map(({ column, code }) => `${column} ${code}`).join(),
+    );
+
+  it('names a line by number or title, or an entry of the draft, and is told its days before anything is kept', async () => {
+    const calendarId = await begin();
+    const before = await addEntry(village.officer, calendarId, { titleOfficer: 'Plough' });
+    const lines = [line(SPREAD), line(after('end of Spread')), line(after('planned date of Plough'))];
+    const read = await sent(calendarId, input(lines, { dryRun: true }));
+    const [spread, hung, ofDraft] = read.lines;
+    expect(daysBetween(spread?.window?.bestTo ?? '', hung?.window?.bestFrom ?? '')).toBe(7);
+    expect(daysBetween(before.dates.window?.bestFrom ?? '', ofDraft?.window?.bestFrom ?? '')).toBe(7);
+    expect((await sent(calendarId, input(lines))).added).toBe(3);
+  });
+
+  it('is refused where it names none or several, hangs on itself, or on what fewer people will see', async () => {
+    const calendarId = await begin();
+    const twice = { ...SPREAD, number: '2' };
+    expect(await codesOf(calendarId, [line(SPREAD), line(twice), line(after('end of Spread'))])).toEqual([
+      ...['', ''],
+      'when which-entry',
+    ]);
+    const circle = [line({ ...after('end of 2'), number: '1' }), line({ ...after('end of 1'), number: '2' })];
+    expect(await codesOf(calendarId, circle)).toEqual(['when anchor-circle', 'when anchor-circle']);
+    const rite = { ...SPREAD, kind: 'belief' };
+    expect(await codesOf(calendarId, [line(rite), line(after('end of 1'))])).toEqual([
+      '',
+      'when anchor-kept',
+    ]);
+  });
+
+  it('of our own table comes back as it was, with other timings beside and the choice of the board', async () => {
+    const { officer, elder3 } = village;
+    const from = await begin();
+    const sow = await addEntry(officer, from, { notes: 'Ask the committee' });
+    const { variantId } = await addVariant(elder3, from, sow.id);
+    await officer
+      .put(`/api/calendars/${from}/entries/${sow.id}`, {
+        content: { ...sow.content, board: { shows: 'variant', variantId, reason: '=It came first' } },
+        version: sow.version,
+      })
+      .expect(200);
+    const lead = { type: 'entry-planned', entryId: sow.id, day: 'bestTo' } as const;
+    const weed = await addEntry(officer, from, { titleOfficer: 'Weed', lead });
+    await addEntry(officer, from, {
+      titleOfficer: 'Weed again',
+      lead: { type: 'entry-actual', entryId: weed.id },
     });
+    const usual = { from: { month: 5, day: 20 }, to: { month: 6, day: 2 } };
+    await addEntry(officer, from, {
+      ...{ titleOfficer: 'By the leaf', sharingLevel: 'village' },
+      lead: { type: 'nature-sign', name: 'Birch leaf', usual, source: 'Elder A-1' },
+    });
+    const spec = { kind: 'moon-counted', markerKey: 'pleiades', phenomenon: 'heliacal-rising' } as const;
+    await addEntry(officer, from, {
+      ...{ titleOfficer: 'By the Moon', sharingLevel: 'village' },
+      lead: { type: 'sky', spec: { ...spec, event: 'full', count: 2 }, occurrence: 1 },
+    });
+    const exported = async (calendarId: string) =>
+      (await officer.get(`/api/calendars/${calendarId}/versions/draft/calendar.csv`).expect(200)).text;
+    const text = await exported(from);
+    expect(linesOf(text)).toHaveLength(6);
+    // A calendar of the same year at the same place, so that every day is the same, too.
+    await api.dataSource.getRepository(CalendarEntity).update({ id: from }, { year: 1999 });
+    const into = (await beginCalendar(village, years)).id;
+    expect((await sent(into, input(linesOf(text)))).added).toBe(5);
+    const withoutLevel = (csv: string) =>
+      Papa.parse<string[]>(csv).data.map((cells) =>
+        cells.filter((_, index) => CALENDAR_CSV_COLUMNS[index]?.id !== 'level'),
+      );
+    expect(withoutLevel(await exported(into))).toEqual(withoutLevel(text));
   });
 });

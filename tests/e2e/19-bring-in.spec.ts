@@ -29,14 +29,19 @@ test('the officer brings a table in, line by line looked at, and a calendar’s 
   const choose = (name: string, text: string) =>
     bring.getByLabel('File to bring in').setInputFiles({ name, mimeType: '', buffer: Buffer.from(text) });
   const table = (day: string) =>
-    ['Work;type;When;days', `Bind sheaves;farm;Pleiades, first morning;${day}`, 'Sweep;household;6/7;'].join(
-      '\n',
-    );
+    [
+      ...['Work;type;When;days;from', `Bind sheaves;farm;Pleiades, first morning;${day};`],
+      ...[
+        'Sweep;household;6/7;;',
+        'Cart;farm;actual date of Bind sheaves;2;',
+        'Fold;farm;Geese go north;5;2 June',
+      ],
+    ].join('\n');
   await choose('last-year.csv', table('soon'));
   await bring.getByLabel('“When”').selectOption({ label: 'sign or day' });
   await bring.getByLabel('“days”').selectOption({ label: 'days from the sign: best from' });
   await bring.getByRole('button', { name: 'Look at every line' }).click();
-  await expect(bring.getByText('2 lines need another look.')).toBeVisible();
+  await expect(bring.getByText('3 lines need another look.')).toBeVisible();
   await expect(bring.getByText('days from the sign: best from: Write a whole number of days.')).toBeVisible();
   await expectAccessible(page);
   await expectNoSidewaysScroll(page);
@@ -46,24 +51,28 @@ test('the officer brings a table in, line by line looked at, and a calendar’s 
   await expect(bring.getByLabel('“When”')).toHaveValue('when');
   await bring.getByLabel('Days such as 6/7').selectOption({ label: 'The day comes first: 6 July' });
   await bring.getByRole('button', { name: 'Look at every line' }).click();
-  await expect(bring.getByText('All 2 lines are right. Nothing is kept yet.')).toBeVisible();
+  await bring.getByRole('checkbox', { name: '“Geese go north” is a sign of nature' }).check();
+  await bring.getByRole('button', { name: 'Look at every line' }).click();
+  await expect(bring.getByText('All 4 lines are right. Nothing is kept yet.')).toBeVisible();
+  await expect(bring.getByText('Its days come once that other work was really done.')).toBeVisible();
+  await expectNoSidewaysScroll(page);
   await page.route('**/imports/table', async (route) => {
     // The server does it, and the answer never comes.
     await route.fetch();
     await route.abort();
   });
-  await bring.getByRole('button', { name: 'Bring 2 entries in' }).click();
+  await bring.getByRole('button', { name: 'Bring 4 entries in' }).click();
   await expect(bring.getByText(/There is no network just now/u)).toBeVisible();
   await page.unroute('**/imports/table');
-  await bring.getByRole('button', { name: 'Bring 2 entries in' }).click();
-  await expect(bring.getByText('2 entries were brought in. They are drafts.')).toBeVisible();
+  await bring.getByRole('button', { name: 'Bring 4 entries in' }).click();
+  await expect(bring.getByText('4 entries were brought in. They are drafts.')).toBeVisible();
   await expectAccessible(page);
   await bring.getByRole('link', { name: 'Open the draft' }).click();
   await expect(page.getByText('Bind sheaves')).toHaveCount(1);
 
   await page.goBack();
-  await choose('filled.csv', [titles, ...examples, 'Ŋɔ́,Glean,farm,,,,,,1 August'].join('\r\n'));
-  await expect(bring.getByText('2 example lines are passed over.')).toBeVisible();
+  await choose('filled.csv', [titles, ...examples, '4,Ŋɔ́,Glean,farm,,,,,,1 August'].join('\r\n'));
+  await expect(bring.getByText('3 example lines are passed over.')).toBeVisible();
 
   const version = `/api/calendars/${published?.id ?? ''}/versions/${String(published?.published?.number)}`;
   const file = await (await page.request.get(`${version}/calendar.json`)).text();

@@ -183,7 +183,7 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
     importCalendarFile: () => ({ key: randomUUID(), dryRun: true }),
     importTable: () => ({
-      ...{ key: randomUUID(), dryRun: true, dayOrder: null },
+      ...{ key: randomUUID(), dryRun: true, dayOrder: null, natureSigns: [] },
       lines: [{ line: 2, cells: { titleOfficer: 'Mend', kind: 'farm', bestFrom: '06-07' } }],
     }),
     // To itself, which is refused once somebody may copy at all.

@@ -11,8 +11,8 @@ import type { Viewer } from '../../policy/viewer.js';
 import { tightenOtherYears } from '../rollovers/tighter-years.service.js';
 import { expectKnownPeople } from '../sharing/known-people.service.js';
 
-/** How an entry is shared, as its content says it. */
-export function sharingOf({ sharingLevel, sharing }: EntryInput): Sharing {
+/** How an entry or a timing is shared, as its content says it. */
+export function sharingOf({ sharingLevel, sharing }: Pick<EntryInput, 'sharingLevel' | 'sharing'>): Sharing {
   return { level: sharingLevel, details: sharing ?? PLAIN_DETAILS };
 }
 

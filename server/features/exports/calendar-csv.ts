@@ -1,8 +1,8 @@
 import { CALENDAR_CSV_COLUMNS, type CalendarCsvColumn } from '#shared/calendar/csv-columns.js';
-import type { EntryInput } from '#shared/contracts/calendars.js';
+import type { EntryDates, EntryLead } from '#shared/contracts/calendars.js';
 import type { MonthDay } from '#shared/contracts/common.js';
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
-import type { VersionEntryBody } from '#shared/contracts/versions.js';
+import type { SeenVariant, VersionEntryBody } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { csvText, type CsvCell } from '#shared/kernel/csv.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
@@ -20,10 +20,22 @@ export interface CsvOptions {
 
 type Line = Record<CalendarCsvColumn, CsvCell>;
 
-/** A calendar as a table that can be read back: a line an entry, the columns of `csv-columns.ts`. */
+/**
+ * A calendar as a table that can be read back: a line an entry and one for each other timing beside it, the columns of
+ * `csv-columns.ts`. Lines name each other by number, for ids mean nothing in a table.
+ */
 export function calendarCsv(content: CalendarContent, { mark, levels }: CsvOptions): string {
   const t = translatorFor(DEFAULT_LANGUAGE, 'files');
-  const lines = content.entries.map((entry) => lineOf(entry, content, levels, t));
+  const things = content.entries.flatMap(({ entryId, variants = [] }) => [
+    entryId,
+    ...variants.map(({ variantId }) => variantId),
+  ]);
+  const numberOf = new Map(things.map((id, index) => [id, index + 1]));
+  const facts = { content, levels, t, numberOf: (id: string) => numberOf.get(id) ?? null };
+  const lines = content.entries.flatMap((entry) => [
+    entryLine(entry, facts),
+    ...(entry.variants ?? []).map((variant) => variantLine(entry, variant, facts)),
+  ]);
   const rows = [
     CALENDAR_CSV_COLUMNS.map(({ id }) => t(`calendarCsv.column.${id}`)),
     ...lines.map((line) => CALENDAR_CSV_COLUMNS.map(({ id }) => line[id])),
@@ -31,32 +43,61 @@ export function calendarCsv(content: CalendarContent, { mark, levels }: CsvOptio
   return (mark ? UTF8_MARK : '') + csvText(rows);
 }
 
-function lineOf(
-  { content: entry, dates }: VersionEntryBody,
-  { header, label, state }: CalendarContent,
-  levels: boolean,
-  t: Translate,
-): Line {
-  const { titleVillage, titleOfficer, kind, icon, crop, otherSigns, ifLate, caution, notes } = entry;
-  const { window, marker } = dates;
+interface Facts {
+  content: CalendarContent;
+  levels: boolean;
+  t: Translate;
+  numberOf: (id: string) => number | null;
+}
+
+function entryLine({ entryId, content, dates }: VersionEntryBody, facts: Facts): Line {
+  const { titleVillage, titleOfficer, icon, crop, otherSigns, ifLate, caution, notes, board } = content;
+  const { numberOf } = facts;
+  return {
+    ...NOTHING,
+    ...aboutCells(facts, content.sharingLevel),
+    ...{ titleVillage, titleOfficer, icon, crop, otherSigns, ifLate, caution, notes },
+    kind: content.kindWord?.word ?? content.kind,
+    number: numberOf(entryId),
+    ...dayCells(dates),
+    ...leadCells(content.lead, numberOf),
+    ...content.offsets,
+    lastDate: content.lastDate && monthDay(content.lastDate.date),
+    lastDateSource: content.lastDate && content.lastDate.source,
+    protectiveWatch: content.protectiveWatch ? 'yes' : 'no',
+    giver: giverCell(content.giver, facts.t),
+    ...(board && {
+      ...{ boardShows: board.shows, boardReason: board.reason },
+      boardVariant: board.variantId === null ? null : numberOf(board.variantId),
+    }),
+  };
+}
+
+/** Under its entry's names, so that whoever reads the table knows whose timing it is. */
+function variantLine(entry: VersionEntryBody, variant: SeenVariant, facts: Facts): Line {
+  const { titleVillage, titleOfficer } = entry.content;
+  const { content, dates, variantId } = variant;
+  const { otherSigns, ifLate, note, difference, confidence, basis } = content;
+  return {
+    ...NOTHING,
+    ...aboutCells(facts, content.sharingLevel),
+    ...{ titleVillage, titleOfficer, otherSigns, ifLate, notes: note },
+    number: facts.numberOf(variantId),
+    ...dayCells(dates),
+    ...leadCells(content.lead, facts.numberOf),
+    ...content.offsets,
+    giver: giverCell(content.giver, facts.t),
+    variantOf: facts.numberOf(entry.entryId),
+    ...{ variantDifference: difference, variantConfidence: confidence, variantBasis: basis },
+  };
+}
+
+const NOTHING = Object.fromEntries(CALENDAR_CSV_COLUMNS.map(({ id }) => [id, null])) as Line;
+
+function aboutCells({ content: { header, label, state }, levels, t }: Facts, level: string): Partial<Line> {
   const stateWord = t(`ics.state.${state ?? 'draft'}`);
   return {
-    ...{ titleVillage, titleOfficer, icon, crop, otherSigns, ifLate, caution, notes },
-    kind: entry.kindWord?.word ?? kind,
-    earliest: window && window.earliest,
-    bestFrom: window && window.bestFrom,
-    bestTo: window && window.bestTo,
-    lastAdvised: window && window.lastAdvised,
-    signExpected: marker && marker.expected.gregorian,
-    signEarly: marker?.early?.gregorian ?? null,
-    signLate: marker?.late?.gregorian ?? null,
-    ...leadCells(entry.lead),
-    ...entry.offsets,
-    lastDate: entry.lastDate && monthDay(entry.lastDate.date),
-    lastDateSource: entry.lastDate && entry.lastDate.source,
-    protectiveWatch: entry.protectiveWatch ? 'yes' : 'no',
-    giver: entry.giver === GIVER_BY_ROLE ? t('sheet.byRole') : entry.giver,
-    level: levels ? entry.sharingLevel : null,
+    level: levels ? level : null,
     year: header.year,
     place: header.place.name,
     issue: label === null ? stateWord : [label, stateWord].join(', '),
@@ -64,27 +105,48 @@ function lineOf(
   };
 }
 
-type LeadCells = Pick<
-  Line,
-  'leadType' | 'leadMarker' | 'leadPhenomenon' | 'leadOccurrence' | 'leadDate' | 'leadSource' | 'leadOther'
->;
+function dayCells({ window, marker }: EntryDates): Partial<Line> {
+  return {
+    earliest: window && window.earliest,
+    bestFrom: window && window.bestFrom,
+    bestTo: window && window.bestTo,
+    lastAdvised: window && window.lastAdvised,
+    signExpected: marker && marker.expected.gregorian,
+    signEarly: marker?.early?.gregorian ?? null,
+    signLate: marker?.late?.gregorian ?? null,
+  };
+}
 
-function leadCells(lead: EntryInput['lead']): LeadCells {
-  const none = { leadMarker: null, leadPhenomenon: null, leadOccurrence: null, leadDate: null };
-  const cells = { ...none, leadSource: null, leadOther: null, leadType: lead.type };
+function leadCells(lead: EntryLead, numberOf: Facts['numberOf']): Partial<Line> {
+  const leadType = lead.type;
   switch (lead.type) {
-    case 'marker':
+    case 'marker': {
+      const { markerKey, phenomenon, occurrence } = lead;
       return {
-        ...cells,
-        leadMarker: lead.markerKey,
-        leadPhenomenon: lead.phenomenon,
-        leadOccurrence: lead.occurrence,
+        ...{ leadType, leadMarker: markerKey, leadPhenomenon: phenomenon },
+        leadOccurrence: occurrence,
       };
+    }
     case 'fixed-date':
-      return { ...cells, leadDate: monthDay(lead.date), leadSource: lead.source };
+      return { leadType, leadDate: monthDay(lead.date), leadSource: lead.source };
+    case 'nature-sign': {
+      const { from, to } = lead.usual;
+      return {
+        ...{ leadType, leadOther: lead.name, leadSource: lead.source },
+        ...{ usualFrom: monthDay(from), usualTo: monthDay(to) },
+      };
+    }
+    case 'entry-planned':
+      return { leadType, leadEntry: numberOf(lead.entryId), leadDay: lead.day };
+    case 'entry-actual':
+      return { leadType, leadEntry: numberOf(lead.entryId) };
     default:
-      return { ...cells, leadOther: canonicalJson(lead) };
+      return { leadType, leadOther: canonicalJson(lead) };
   }
+}
+
+function giverCell(giver: string, t: Translate): string {
+  return giver === GIVER_BY_ROLE ? t('sheet.byRole') : giver;
 }
 
 function monthDay({ month, day }: MonthDay): string {

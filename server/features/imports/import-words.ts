@@ -1,34 +1,88 @@
 import { WELL_KNOWN_KEYS, allMarkerKeys, markerNamesOf } from '../stars/marker-names.service.js';
 import { plainWords, type ImportWords } from '#shared/calendar/import-dates.js';
+import { phrasesOf, type PhraseTree } from '#shared/calendar/import-phrases.js';
 import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
 import type { VillageWord } from '#shared/contracts/village-word.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
-import { texts as calendarTexts } from '#shared/locales/en/calendars.js';
-import { texts } from '#shared/locales/en/imports.js';
+import { resources } from '#shared/locales/index.js';
+import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
+import { PHENOMENA, type Phenomenon } from '#shared/sky/index.js';
 import type { KnownWords } from '../word-lists/known-words.service.js';
 
-const { words } = texts;
+/** Of one language, what its files say by which a table may be written. */
+export interface ImportLocale {
+  words: {
+    months: string;
+    phenomena: Readonly<Record<Phenomenon, string>>;
+    fixedDate: string;
+    figures: Readonly<Record<string, string>>;
+    phrases: PhraseTree;
+    kinds: Readonly<Record<EntryKind, string>>;
+    yes: string;
+  };
+  kindNames: Readonly<Record<EntryKind, string>>;
+  phenomenonNames: Readonly<Record<Phenomenon, string>>;
+  /** Names that the product itself gives to signs of the sky. */
+  signNames: PhraseTree;
+}
 
-/** What tables in the language of the office may say. English is the one there is. */
-export const IMPORT_WORDS: ImportWords = {
-  months: words.months.split('|').map(namesOf),
-  phenomena: {
-    'heliacal-rising': namesOf(words.phenomena['heliacal-rising']),
-    'cosmical-setting': namesOf(words.phenomena['cosmical-setting']),
-    'acronychal-rising': namesOf(words.phenomena['acronychal-rising']),
-    'heliacal-setting': namesOf(words.phenomena['heliacal-setting']),
-  },
-  fixedDate: namesOf(words.fixedDate),
-};
+/** What tables may say, in every language at once: a village's table is in whichever its people write. */
+export interface TableWords {
+  dates: ImportWords;
+  kinds: ReadonlyMap<string, EntryKind>;
+  yes: ReadonlySet<string>;
+  /** Figures that the product knows, by what people call them. */
+  figures: ReadonlyMap<string, string>;
+}
 
-export const DAY_SOURCE = words.source;
-export const SEASONS: ReadonlyMap<string, string> = keyByName(words.seasons);
-export const YES: ReadonlySet<string> = new Set(namesOf(words.yes));
+export function tableWordsOf(locales: readonly ImportLocale[]): TableWords {
+  const months = locales.map(({ words }) => words.months.split('|').map(namesOf));
+  return {
+    dates: {
+      months: Array.from({ length: 12 }, (_, month) => months.flatMap((each) => each[month] ?? [])),
+      phenomena: byWord(PHENOMENA, (phenomenon) =>
+        locales.flatMap(({ words, phenomenonNames }) => [
+          plainWords(phenomenonNames[phenomenon]),
+          ...namesOf(words.phenomena[phenomenon]),
+        ]),
+      ),
+      fixedDate: locales.flatMap(({ words }) => namesOf(words.fixedDate)),
+      phrases: phrasesOf(...locales.flatMap(({ words, signNames }) => [signNames, words.phrases])),
+    },
+    kinds: new Map([
+      ...ENTRY_KINDS.map((kind) => [kind, kind] as const),
+      ...locales.flatMap(({ words, kindNames }) =>
+        ENTRY_KINDS.flatMap((kind) =>
+          [plainWords(kindNames[kind]), ...namesOf(words.kinds[kind])].map((name) => [name, kind] as const),
+        ),
+      ),
+    ]),
+    yes: new Set(locales.flatMap(({ words }) => namesOf(words.yes))),
+    figures: new Map(
+      locales.flatMap(({ words }) =>
+        Object.entries(words.figures).flatMap(([key, list]) =>
+          namesOf(list).map((name) => [name, key] as const),
+        ),
+      ),
+    ),
+  };
+}
 
-const KINDS: ReadonlyMap<string, string> = new Map([
-  ...Object.entries(calendarTexts.kind).map(([kind, name]) => [plainWords(name), kind] as const),
-  ...keyByName(words.kinds),
-]);
+/** Of the languages that are there. */
+export const TABLE_WORDS = tableWordsOf(
+  LANGUAGES.map((language) => {
+    const { imports, calendars, sky } = resources[language];
+    return {
+      words: imports.words,
+      kindNames: calendars.kind,
+      phenomenonNames: sky.phenomenon,
+      signNames: sky.sign,
+    };
+  }),
+);
+
+/** Who is said to set a day that a table gives without saying so. */
+export const DAY_SOURCE = resources[DEFAULT_LANGUAGE].imports.words.source;
 
 /** What a village calls kinds of events, by plain words. */
 export type VillageKinds = ReadonlyMap<string, { kind: EntryKind; kindWord: VillageWord }>;
@@ -36,38 +90,25 @@ export type VillageKinds = ReadonlyMap<string, { kind: EntryKind; kindWord: Vill
 export function villageKinds({ kinds }: KnownWords): VillageKinds {
   return new Map(
     [...kinds.values()].flatMap(({ key, like, word }) => {
-      if (word === '' || !isKind(like)) return [];
+      const kind = ENTRY_KINDS.find((each) => each === like);
+      if (word === '' || kind === undefined) return [];
       const kindWord = key === like ? { word } : { id: key, word };
-      return [[plainWords(word), { kind: like, kindWord }] as const];
+      return [[plainWords(word), { kind, kindWord }] as const];
     }),
   );
 }
 
-/** The village's own words come before all others. */
-export function kindOf(
-  text: string,
-  village: VillageKinds,
-): { kind: EntryKind | null; kindWord?: VillageWord } {
-  const plain = plainWords(text);
-  const own = village.get(plain);
-  if (own) return own;
-  const kind = KINDS.get(plain) ?? plain;
-  return { kind: isKind(kind) ? kind : null };
-}
-
-function isKind(code: string | null): code is EntryKind {
-  return ENTRY_KINDS.some((kind) => kind === code);
-}
-
 /** Stars and figures by every name that the village has for them; its own figures come before all others. */
-export function markerKeysByName(figures: readonly SkyFigure[]): Map<string, string> {
+export function markerKeysByName(
+  figures: readonly SkyFigure[],
+  ownNames: ReadonlyMap<string, string>,
+): Map<string, string> {
   const byName = new Map<string, string>();
   const add = (name: string, key: string) => {
     const plain = plainWords(name);
     if (plain !== '' && !byName.has(plain)) byName.set(plain, key);
   };
-  for (const { key, name } of figures) add(name, key);
-  const builtIn = keyByName(words.figures);
+  for (const [name, key] of ownNames) add(name, key);
   const keys = [...WELL_KNOWN_KEYS, ...allMarkerKeys(figures)];
   for (const key of keys) {
     const { name, designation } = markerNamesOf(key, figures);
@@ -76,18 +117,17 @@ export function markerKeysByName(figures: readonly SkyFigure[]): Map<string, str
     if (key.startsWith('hr')) add(designation, key);
     add(key, key);
   }
-  for (const [name, key] of builtIn) add(name, key);
+  for (const [name, key] of TABLE_WORDS.figures) add(name, key);
   return byName;
 }
 
-function keyByName(names: Readonly<Record<string, string>>): Map<string, string> {
-  return new Map(
-    Object.entries(names).flatMap(([key, list]) =>
-      namesOf(list).map((name) => [plainWords(name), key] as const),
-    ),
-  );
+function byWord<K extends string, V>(words: readonly K[], valueOf: (word: K) => V): Record<K, V> {
+  return Object.fromEntries(words.map((word) => [word, valueOf(word)])) as Record<K, V>;
 }
 
 function namesOf(list: string): string[] {
-  return list.split(',').map((name) => plainWords(name));
+  return list
+    .split(',')
+    .map((name) => plainWords(name))
+    .filter((name) => name !== '');
 }

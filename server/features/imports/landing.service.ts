@@ -30,7 +30,7 @@ export interface LandingEntry {
   sameAs: string | null;
   /** Somebody has to be asked before it is used: a consent that nobody has answered yet says so. */
   isToBeAsked?: boolean;
-  variants: readonly { id: string; content: VariantInput; sameAs: string }[];
+  variants: readonly { id: string; content: VariantInput; sameAs: string | null }[];
 }
 
 export interface Landed {
@@ -92,23 +92,17 @@ async function land(
     const content = await withSignsOfThisVillage(manager, viewer, said);
     const position = room.first + index;
     await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
-    if (sameAs === null) {
-      const giverId = content.giverId ?? person.id;
-      await insertSharing(manager, {
-        itemType: 'entry',
-        itemId: id,
-        communityId,
-        ...sharingOf(content),
-        giverId,
-      });
-    } else await goAlong(manager, 'entry', calendarId, sameAs, id);
+    await share(manager, actor, calendarId, { itemType: 'entry', itemId: id, content, sameAs });
     if (isToBeAsked === true) await ask(manager, actor, { id, content }, at);
     for (const variant of variants) {
       await manager.insert(EntryVariantEntity, {
         ...{ id: variant.id, entryId: id, content: variant.content, addedAt: at },
         ...touched,
       });
-      await goAlong(manager, 'variant', calendarId, variant.sameAs, variant.id);
+      const { id: itemId, sameAs: fromId } = variant;
+      await share(manager, actor, calendarId, {
+        ...{ itemType: 'variant', itemId, content: variant.content, sameAs: fromId },
+      });
     }
   }
   await expectAnchored(manager, actor, calendarId, entries, at);
@@ -158,6 +152,24 @@ const NOTHING_SAID: Omit<ConsentDetails, 'askedOn' | 'level'> = {
   ...{ explainedBy: '', explanation: '', proof: null, naming: null, conditions: '', benefits: '' },
   ...{ afterDeath: null, passTo: '', mayWithdraw: [] },
 };
+
+/** Something new is shared as its words say; the same thing of another draft as it is there. */
+async function share(
+  manager: EntityManager,
+  { communityId, person }: Actor,
+  calendarId: string,
+  landing: {
+    itemType: 'entry' | 'variant';
+    itemId: string;
+    content: EntryInput | VariantInput;
+    sameAs: string | null;
+  },
+): Promise<void> {
+  const { itemType, itemId, content, sameAs } = landing;
+  if (sameAs !== null) return goAlong(manager, itemType, calendarId, sameAs, itemId);
+  const giverId = content.giverId ?? person.id;
+  await insertSharing(manager, { itemType, itemId, communityId, ...sharingOf(content), giverId });
+}
 
 async function goAlong(
   manager: EntityManager,

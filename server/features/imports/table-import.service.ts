@@ -1,27 +1,32 @@
-import type { EntryInput } from '#shared/contracts/calendars.js';
+import { anchoredDates } from '#shared/calendar/anchors.js';
+import { plainWords } from '#shared/calendar/import-dates.js';
+import type { EntryDates } from '#shared/contracts/calendars.js';
 import type { ReadLine, TableImport, TableInput } from '#shared/contracts/imports.js';
+import type { SkyFigure } from '#shared/contracts/stars.js';
 import { texts } from '#shared/locales/en/problems.js';
-import { randomUUID } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
-import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { AppError, type FieldCode } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { viewerOf } from '../../policy/viewer.js';
-import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
+import { entrySight } from '../../policy/entry-sight.js';
+import { viewerOf, type Viewer } from '../../policy/viewer.js';
+import { actualRows } from '../actual-days/known-days.service.js';
+import { readDraft, type Draft } from '../calendars/draft.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
-import { figuresSeenBy } from '../figures/village-figures.service.js';
+import { figureKeysByName, figuresSeenBy } from '../figures/village-figures.service.js';
 import { knownWords } from '../word-lists/known-words.service.js';
-import { IMPORT_WORDS, markerKeysByName, SEASONS, villageKinds } from './import-words.js';
-import { landOnce } from './landing.service.js';
-import { entryOfLine } from './table-line.js';
+import { markerKeysByName, TABLE_WORDS, villageKinds } from './import-words.js';
+import { landOnce, type LandingEntry } from './landing.service.js';
+import type { TableFacts } from './table-cells.js';
+import { tablePlan, type DraftTitle, type PlannedLine } from './table-plan.js';
+import { natureSignsOf } from './village-signs.service.js';
 
 interface Read {
   lines: ReadLine[];
   /** In the order of the lines; those with something the matter are missing. */
-  contents: EntryInput[];
+  entries: LandingEntry[];
 }
 
 /** Lines of somebody's table, as entries of a draft. */
@@ -37,8 +42,8 @@ export class TableImportService {
     const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
     if (input.dryRun) {
       if (calendar.outNumber !== null) throw new AppError('draft-locked');
-      const { lines, contents } = await this.read(manager, actor, calendar, input);
-      return { added: contents.length, lines };
+      const { lines, entries } = await this.read(manager, actor, calendar, input);
+      return { added: entries.length, lines };
     }
     const at = this.clock.now();
     let lines: ReadLine[] = [];
@@ -47,10 +52,7 @@ export class TableImportService {
         const read = await this.read(within, actor, calendar, input);
         expectAllGood(read.lines);
         lines = read.lines;
-        const entries = read.contents.map((content) => ({
-          ...{ id: randomUUID(), content, sameAs: null, variants: [] },
-        }));
-        return { way: 'table', entries, refused: 0 };
+        return { way: 'table', entries: read.entries, refused: 0 };
       }),
     );
     return { added, lines };
@@ -59,43 +61,108 @@ export class TableImportService {
   private async read(
     manager: EntityManager,
     actor: Actor,
-    { placeId, year }: CalendarEntity,
-    { lines, dayOrder }: TableInput,
+    calendar: CalendarEntity,
+    { lines, dayOrder, natureSigns }: TableInput,
   ): Promise<Read> {
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const figures = await figuresSeenBy(manager, viewer);
-    const facts = {
-      ...{ words: IMPORT_WORDS, dayOrder, calendarYear: year },
-      ...{ markerKeyOf: markerKeysByName(figures), signKeyOf: SEASONS },
+    const draft = await readDraft(manager, this.sky, calendar);
+    const facts: TableFacts = {
+      ...{ kinds: TABLE_WORDS.kinds, yes: TABLE_WORDS.yes },
       villageKinds: villageKinds(await knownWords(manager, actor.communityId)),
+      ...{ words: TABLE_WORDS.dates, dayOrder, calendarYear: calendar.year },
+      markerKeyOf: markerKeysByName(figures, await figureKeysByName(manager, viewer)),
+      latitudeDeg: draft.place.latitudeDeg,
+      natureSigns: new Map([
+        ...(await natureSignsOf(manager, viewer)),
+        ...natureSigns.map((name) => [plainWords(name), name.trim()] as const),
+      ]),
     };
-    const read = lines.map((line) => {
-      const { content, problems } = entryOfLine(line, facts);
-      const markerKey = content && markerKeyOfLead(content.lead);
-      if (content === null || markerKey === null || knowsMarker(markerKey, figures)) {
-        return { line, content, problems };
-      }
-      return { line, content: null, problems: [{ column: 'leadMarker' as const, code: 'unknown-marker' }] };
-    });
-    const contents = read.flatMap(({ content }) => content ?? []);
-    const place = toPlaceSnapshot(await manager.findOneByOrFail(PlaceEntity, { id: placeId }));
-    const dates = this.sky.datesOf({ ...place, figures }, year, contents);
-    const datesOf = new Map(contents.map((content, index) => [content, dates[index]]));
+    const planned = tablePlan(lines, facts, await titlesForAll(manager, viewer, draft)).map((line) =>
+      withKnownMarker(line, figures),
+    );
+    const entries = planned.flatMap(({ entry }) => entry ?? []);
+    const dates = await this.datesOf(manager, calendar.year, draft, figures, entries);
     return {
-      contents,
-      lines: read.map(({ line: { line, cells }, content, problems }) => {
-        const own = content ? datesOf.get(content) : undefined;
+      entries,
+      lines: planned.map(({ line: { line, cells }, entry, problems }) => {
+        const own = entry ? dates.get(entry.id) : undefined;
         return {
           line,
           title: (cells.titleOfficer ?? '').trim() || (cells.titleVillage ?? '').trim(),
-          protectiveWatch: content?.protectiveWatch ?? false,
+          protectiveWatch: entry?.content.protectiveWatch ?? false,
+          lead: entry?.content.lead ?? null,
           window: own?.window ?? null,
           warnings: own?.warnings ?? [],
-          problems,
+          problems: [...problems],
         };
       }),
     };
   }
+
+  /** As the draft would have them with all these lines in it. */
+  private async datesOf(
+    manager: EntityManager,
+    year: number,
+    draft: Draft,
+    figures: SkyFigure[],
+    entries: readonly LandingEntry[],
+  ): Promise<Map<string, EntryDates | null>> {
+    const own = this.sky.datesOf(
+      { ...draft.place, figures },
+      year,
+      entries.map(({ content }) => content),
+    );
+    const actual = await actualRows(
+      manager,
+      draft.entries.map(({ row }) => row.id),
+    );
+    const known = draft.entries.map(({ row: { id, content }, dates }) => ({ id, content, dates }));
+    const coming = entries.map(({ id, content }, index) => ({ id, content, dates: own[index] ?? null }));
+    return anchoredDates(
+      [...known, ...coming].map(({ id, content, dates }) => ({
+        ...{ id, lead: content.lead, timing: content, dates },
+      })),
+      year,
+      {
+        mayHang: () => true,
+        actualOf: (id) => {
+          const row = actual.get(id);
+          return row ? { from: row.firstDay, to: row.lastDay } : null;
+        },
+      },
+    );
+  }
+}
+
+/** Entries of the draft on which others may hang: those that everybody of the village sees. */
+async function titlesForAll(
+  manager: EntityManager,
+  viewer: Viewer,
+  { entries }: Draft,
+): Promise<DraftTitle[]> {
+  const things = entries.map(({ row }) => ({
+    ...{ row, entryId: row.id, markerKey: markerKeyOfLead(row.content.lead) },
+  }));
+  const sight = await entrySight(manager, viewer, things);
+  return things
+    .filter((thing) => sight.isForVillage(thing))
+    .map(({ row: { id, content } }) => ({ id, titles: [content.titleOfficer, content.titleVillage] }));
+}
+
+function withKnownMarker(planned: PlannedLine, figures: readonly SkyFigure[]): PlannedLine {
+  const { entry, problems } = planned;
+  const leads = entry ? [entry.content.lead, ...entry.variants.map(({ content }) => content.lead)] : [];
+  const isKnown = leads.every((lead) => {
+    const markerKey = markerKeyOfLead(lead);
+    return markerKey === null || knowsMarker(markerKey, figures);
+  });
+  if (isKnown) return planned;
+  return {
+    ...planned,
+    entry: null,
+    problems: [...problems, { column: 'leadMarker', code: 'unknown-marker' }],
+  };
 }
 
 /** All or nothing: one line that is not right keeps every one out. */

@@ -1,11 +1,30 @@
+import { plainWords } from '#shared/calendar/import-dates.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
-import { In, type EntityManager } from 'typeorm';
+import { In, IsNull, type EntityManager } from 'typeorm';
 import { SignEntity } from '../../db/entities/sign.entity.js';
 import { isForVillage } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import { keepingShared, sharedSignIds } from '../../policy/sign-sight.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { withListedSigns } from '../signs/entry-signs.service.js';
+
+/** Signs of the village's list that everybody sees, by their names as tables are compared. */
+export async function natureSignsOf(
+  manager: EntityManager,
+  { communityId, today }: Viewer,
+): Promise<Map<string, string>> {
+  const rows = await manager.findBy(SignEntity, { communityId, takenOutAt: IsNull() });
+  const shared = await sharedById(
+    manager,
+    'sign',
+    rows.map(({ id }) => id),
+  );
+  return new Map(
+    rows
+      .filter(({ id }) => isForVillage(shared.get(id), today))
+      .map(({ words: { name } }) => [plainWords(name), name] as const),
+  );
+}
 
 /** Contents with those signs of the village's list alone that stand there today for everybody, in the list's words. */
 export async function withSignsOfToday<E extends { content: EntryInput }>(

@@ -18,11 +18,72 @@ export const texts = {
       'ursa-major-seven': 'Seven Stars, Plough, Big Dipper',
       'southern-cross': 'Cross, Southern Cross foot star',
     },
-    seasons: {
-      'march-equinox': 'March equinox',
-      'june-solstice': 'June solstice',
-      'september-equinox': 'September equinox',
-      'december-solstice': 'December solstice',
+    /**
+     * Other ways to name what a line goes by, beside the names that the product itself gives (`sky.ts`, `sign`). A line parts
+     * them; what differs stands in double braces, by the names that the product's own texts use.
+     */
+    phrases: {
+      'due-meridian': {
+        south: '{{star}} due south at {{hour}} | {{star}} due south at {{hour}} local sun time',
+        north: '{{star}} due north at {{hour}} | {{star}} due north at {{hour}} local sun time',
+      },
+      'about-pole': {
+        lowest: '{{star}} straight below the pole at {{hour}} | {{star}} below the pole at {{hour}}',
+        highest: '{{star}} straight above the pole at {{hour}} | {{star}} above the pole at {{hour}}',
+      },
+      'sun-season': {
+        'march-equinox': 'March equinox',
+        'june-solstice': 'June solstice',
+        'september-equinox': 'September equinox',
+        'december-solstice': 'December solstice',
+      },
+      season: {
+        spring: 'spring equinox | vernal equinox',
+        summer: 'summer solstice | midsummer | midsummer day',
+        autumn: 'autumn equinox | fall equinox',
+        winter: 'winter solstice | midwinter | midwinter day',
+      },
+      'noon-sun': {
+        back: {
+          named: 'Sun back over {{ridge}} at noon | Sun clears {{ridge}} at noon',
+          plain: 'Sun back over the skyline at noon | Sun clears the skyline at noon',
+        },
+        gone: {
+          named: 'Sun last over {{ridge}} at noon',
+          plain: 'Sun last over the skyline at noon',
+        },
+      },
+      'zenith-sun': 'Sun overhead | Sun overhead at noon | no shadow at noon',
+      'dark-night': {
+        last: {
+          depth:
+            'last night with the Sun {{depth}} degrees down | last star night (Sun no deeper than {{depth}} degrees)',
+          6: 'last stars before the light nights',
+          15: 'last night dark enough for the Milky Way',
+        },
+        first: {
+          depth:
+            'first night with the Sun {{depth}} degrees down | first star night (Sun no deeper than {{depth}} degrees)',
+          6: 'first star after the light nights | first stars after the light nights',
+          15: 'first night dark enough for the Milky Way',
+        },
+      },
+      'moon-phase': {
+        new: 'new Moon {{number}} | new Moon number {{number}} of the year',
+        'first-crescent': 'first crescent {{number}} | first crescent number {{number}} of the year',
+        full: 'full Moon {{number}} | full Moon number {{number}} of the year',
+      },
+      nature: 'sign of nature: {{name}} | nature: {{name}}',
+      /** Days of another line or entry, by its title or number. */
+      entry: {
+        actual:
+          'actual date of {{entry}} | actual day of {{entry}} | actual {{entry}} date | when {{entry}} was done | {{entry}}, done | {{entry}} was really done',
+        earliest: 'earliest day of {{entry}} | {{entry}}, earliest day',
+        bestFrom:
+          'planned date of {{entry}} | planned day of {{entry}} | planned {{entry}} date | start of {{entry}} | first best day of {{entry}} | {{entry}}, first best day',
+        bestTo: 'end of {{entry}} | last best day of {{entry}} | {{entry}}, last best day',
+        lastAdvised: 'last advised day of {{entry}} | {{entry}}, last advised day',
+      },
     },
     kinds: {
       farm: 'farm, field, farming',
@@ -40,6 +101,7 @@ export const texts = {
   /** Title of the column that no file of ours has, and other titles that a column may stand under, which a line parts. */
   column: { when: 'sign or day' },
   alias: {
+    number: 'number | no | nr | id | line',
     titleVillage: 'village name | local name',
     titleOfficer: 'title | name | event | work',
     kind: 'type',
@@ -61,6 +123,17 @@ export const texts = {
     leadDate: '',
     leadSource: 'source of the day',
     leadOther: '',
+    leadEntry: '',
+    leadDay: '',
+    usualFrom: 'usual days from',
+    usualTo: 'usual days to',
+    variantOf: '',
+    variantDifference: '',
+    variantConfidence: '',
+    variantBasis: '',
+    boardShows: '',
+    boardVariant: '',
+    boardReason: '',
     lastDate: 'deadline',
     lastDateSource: 'office',
     protectiveWatch: 'watch',
@@ -72,20 +145,32 @@ export const texts = {
   },
   template: {
     fileName: 'dawnpeg-table.csv',
-    /** Lines that show how; they are passed over where nobody changed them. */
-    bySign: {
-      title: 'Example: sow the first field',
-      kind: 'farm',
-      when: 'Pleiades, first morning',
-      bestFromDays: '7',
-      bestToDays: '23',
-      otherSigns: 'Soil wet to a hand depth',
-    },
-    byDay: {
-      title: 'Example: close the store',
-      kind: 'household',
-      bestFrom: '20 November',
-      bestTo: 'December 1',
+    /** Lines that show how, by their columns; they are passed over where nobody changed them. */
+    lines: {
+      bySign: {
+        number: '1',
+        titleOfficer: 'Example: sow the first field',
+        kind: 'farm',
+        when: 'Pleiades, first morning',
+        bestFromDays: '7',
+        bestToDays: '23',
+        otherSigns: 'Soil wet to a hand depth',
+      },
+      byWork: {
+        number: '2',
+        titleOfficer: 'Example: weed it',
+        kind: 'farm',
+        when: 'actual date of 1',
+        bestFromDays: '19',
+        bestToDays: '26',
+      },
+      byDay: {
+        number: '3',
+        titleOfficer: 'Example: close the store',
+        kind: 'household',
+        bestFrom: '20 November',
+        bestTo: 'December 1',
+      },
     },
   },
   page: {
@@ -129,6 +214,11 @@ export const texts = {
     examples_one: '{{count}} example line is passed over.',
     examples_other: '{{count}} example lines are passed over.',
   },
+  nature: {
+    title: 'Signs of nature?',
+    what: 'These words name no sign of the sky. Tick those that name something that grows, flies, blows or flows; the days on which it usually comes follow from the line’s own days.',
+    one: '“{{word}}” is a sign of nature',
+  },
   lines: {
     title: 'What each line becomes',
     caption: 'Lines of the table, with what they become or what is the matter',
@@ -142,6 +232,8 @@ export const texts = {
     entry: 'Entry',
     becomes: 'Becomes',
     problem: '{{column}}: {{remedy}}',
+    waits: 'Its days come once that other work was really done.',
+    anchorWithoutDays: 'No day yet: what it counts from has none.',
     noDay: 'No day in this year: its sign does not come here, or a last date closes it.',
     bring_one: 'Bring {{count}} entry in',
     bring_other: 'Bring {{count}} entries in',

@@ -259,13 +259,18 @@ export const texts = {
     'unknown-star-name':
       'The village knows no star or figure of this name. Use its name from the list of stars.',
     'unknown-sign-words':
-      'No sign goes by these words. Name a star with its day, such as “Pleiades, first morning”, or write a day of the year.',
+      'No sign of the sky goes by these words. Name a star with its day, such as “Pleiades, first morning”, write a day of the year, or say above that it is a sign of nature.',
     'date-missing': 'This line says no day. Name a sign, or write from when the best days are.',
     'mixed-dates': 'This line names two signs. Let all its days go by one of them.',
     'days-missing': 'Say how many days after the sign the best days begin; a minus means before it.',
     'unknown-kind': 'This kind is not known. Use one such as farm, household, community, belief or safety.',
-    'needs-another-entry':
-      'What counts from another entry comes in with a calendar’s own file, not with a table.',
+    'which-entry':
+      'This does not say which work it is counted from. Name one line by its number or its whole title, such as “actual date of A04”.',
+    'which-season':
+      'So near the equator this may be either. Write March equinox, June solstice, September equinox or December solstice.',
+    'direction-missing': 'Say the direction in degrees, such as “Sunrise in the east, at 90°”.',
+    'usual-days-missing':
+      'Say on which days this sign usually comes, or fill in both the best days and how many days after the sign they are.',
     'not-a-calendar-file': 'This is no calendar file. Choose one that was taken along as “whole (JSON)”.',
     'not-a-picture': 'This is no picture that can be shown here. Choose a JPEG, PNG or WebP.',
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',

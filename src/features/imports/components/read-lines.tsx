@@ -1,6 +1,10 @@
 import { FileInput } from 'lucide-react';
+import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
+import type { Calendar } from '#shared/contracts/calendars.js';
 import type { ReadLine } from '#shared/contracts/imports.js';
+import { markersQuery } from '#src/lib/calendar-queries.js';
+import type { NamesByKey } from '#src/lib/marker-names.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
@@ -10,14 +14,16 @@ import { useImportColumnWords } from '../model/use-import-words.js';
 
 interface ReadLinesProps {
   lines: readonly ReadLine[];
-  year: number;
+  calendar: Pick<Calendar, 'placeId' | 'year'>;
   isBusy: boolean;
   onBring: () => void;
 }
 
 /** What every line becomes, or what is the matter with it; those that need another look come first. */
-export function ReadLines({ lines, year, isBusy, onBring }: ReadLinesProps) {
+export function ReadLines({ lines, calendar, isBusy, onBring }: ReadLinesProps) {
   const { t } = useTranslation('imports');
+  const { placeId, year } = calendar;
+  const markers = useQuery(markersQuery(placeId, year)).data?.byKey ?? NO_NAMES;
   const wrong = lines.filter(({ problems }) => problems.length > 0);
   const right = lines.filter(({ problems }) => problems.length === 0);
   return (
@@ -44,7 +50,7 @@ export function ReadLines({ lines, year, isBusy, onBring }: ReadLinesProps) {
               <td>{line.line}</td>
               <th scope="row">{line.title}</th>
               <td>
-                <Becomes line={line} year={year} />
+                <Becomes line={line} year={year} markers={markers} />
               </td>
             </tr>
           ))}
@@ -62,7 +68,16 @@ export function ReadLines({ lines, year, isBusy, onBring }: ReadLinesProps) {
   );
 }
 
-function Becomes({ line, year }: { line: ReadLine; year: number }) {
+const NO_NAMES: NamesByKey = new Map();
+
+interface BecomesProps {
+  line: ReadLine;
+  year: number;
+  markers: NamesByKey;
+}
+
+/** Its days, and how its words were understood: what it goes by. */
+function Becomes({ line, year, markers }: BecomesProps) {
   const { t } = useTranslation('imports');
   const words = useEntryWords();
   const problems = useProblemWords();
@@ -78,6 +93,16 @@ function Becomes({ line, year }: { line: ReadLine; year: number }) {
       </ul>
     );
   }
-  if (line.window === null) return t('lines.noDay');
-  return words.window(line, line.window, year);
+  const { lead, window, warnings } = line;
+  const noDay = warnings.includes('waits-for-actual-day')
+    ? 'lines.waits'
+    : warnings.includes('anchor-gone') || warnings.includes('anchor-without-days')
+      ? 'lines.anchorWithoutDays'
+      : 'lines.noDay';
+  return (
+    <>
+      <p>{window === null ? t(noDay) : words.window(line, window, year)}</p>
+      {lead !== null && !('entryId' in lead) && <p className="text-small">{words.lead({ lead }, markers)}</p>}
+    </>
+  );
 }

@@ -14,11 +14,13 @@ import {
   type Matching,
 } from '../model/match-columns.js';
 import type { SavedTable } from '../model/read-table.js';
+import { wordsNobodyKnows } from '../model/unknown-words.js';
 import { isExample } from '../model/template.js';
 import { useImportColumnWords } from '../model/use-import-words.js';
 import { useStoppable } from '../model/use-stoppable.js';
 import { LongWork } from './long-work.js';
 import { MatchFields } from './match-fields.js';
+import { NatureSigns } from './nature-signs.js';
 import { ReadLines } from './read-lines.js';
 
 interface TableImportStepsProps {
@@ -38,13 +40,16 @@ export function TableImportSteps({ calendar, importKey, table, onDone }: TableIm
     () => keptMatching(readKept(keptAt), table.titles) ?? guessColumns(table.titles, titlesOf),
   );
   const [dayOrder, setDayOrder] = useState<TableInput['dayOrder']>(null);
+  /** Words that no list knows, as they came up when the lines were looked at; and which of them are signs of nature. */
+  const [unknownWords, setUnknownWords] = useState<readonly string[]>([]);
+  const [natureSigns, setNatureSigns] = useState<readonly string[]>([]);
   const look = useTableImport(calendar.id);
   const bring = useTableImport(calendar.id);
   const work = useStoppable();
 
   const all = matchedLines(table, matching);
   const lines = all.filter((line) => !isExample(line, examples));
-  const send = { key: importKey, dayOrder, lines };
+  const send = { key: importKey, dayOrder, lines, natureSigns: [...natureSigns] };
   const changed = (change: () => void) => {
     change();
     look.reset();
@@ -69,13 +74,29 @@ export function TableImportSteps({ calendar, importKey, table, onDone }: TableIm
           });
         }}
       />
+      <NatureSigns
+        words={unknownWords}
+        chosen={natureSigns}
+        onChoose={(next) => {
+          changed(() => {
+            setNatureSigns(next);
+          });
+        }}
+      />
       {all.length > lines.length && <p>{t('match.examples', { count: all.length - lines.length })}</p>}
       <Button
         icon={<ListChecks aria-hidden size={20} />}
         busy={look.isPending}
         closedBecause={lines.length === 0 ? t('bring.noLines') : undefined}
         onClick={() => {
-          look.mutate({ ...send, dryRun: true, signal: work.begin() });
+          look.mutate(
+            { ...send, dryRun: true, signal: work.begin() },
+            {
+              onSuccess: (read) => {
+                setUnknownWords([...new Set([...natureSigns, ...wordsNobodyKnows(lines, read.lines)])]);
+              },
+            },
+          );
         }}
       >
         {t('match.look')}
@@ -89,7 +110,7 @@ export function TableImportSteps({ calendar, importKey, table, onDone }: TableIm
       {look.data && (
         <ReadLines
           lines={look.data.lines}
-          year={calendar.year}
+          calendar={calendar}
           isBusy={bring.isPending}
           onBring={() => {
             bring.mutate(

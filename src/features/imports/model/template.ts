@@ -3,6 +3,7 @@ import { csvText } from '#shared/kernel/csv.js';
 
 /** Columns of the empty table: what a person would write by hand. */
 export const TEMPLATE_COLUMNS = [
+  'number',
   'titleVillage',
   'titleOfficer',
   'kind',

@@ -1,44 +1,33 @@
-import { useMemo } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { ImportColumn } from '#shared/contracts/imports.js';
-import type { ExampleLine } from './template.js';
+import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
+import { columnWordsOf, type ColumnTexts, type ImportColumnWords } from './column-words.js';
 
-/** How columns are called, what else they may be called, and the lines of the template. */
-export interface ImportColumnWords {
-  titleOf: (column: ImportColumn) => string;
-  titlesOf: (column: ImportColumn) => readonly string[];
-  examples: readonly ExampleLine[];
-}
-
-type CsvGiven = Exclude<ImportColumn, 'when'>;
-
+/** In the person's own language first; a table may have its titles in any that is there. */
 export function useImportColumnWords(): ImportColumnWords {
-  const { t } = useTranslation(['imports', 'files']);
+  const { i18n } = useTranslation(['imports', 'files']);
+  const own = i18n.resolvedLanguage ?? DEFAULT_LANGUAGE;
+  const isThere = LANGUAGES.every((language) => i18n.hasResourceBundle(language, 'imports'));
+  const [isLoaded, setIsLoaded] = useState(isThere);
+  useEffect(() => {
+    if (isThere) return;
+    void i18n.loadLanguages([...LANGUAGES]).then(() => {
+      setIsLoaded(true);
+    });
+  }, [i18n, isThere]);
   return useMemo(() => {
-    const titleOf = (column: ImportColumn) =>
-      column === 'when'
-        ? t('imports:column.when')
-        : t(`files:calendarCsv.column.${column satisfies CsvGiven}`);
-    const { bySign, byDay } = {
-      bySign: {
-        titleOfficer: t('imports:template.bySign.title'),
-        kind: t('imports:template.bySign.kind'),
-        when: t('imports:template.bySign.when'),
-        bestFromDays: t('imports:template.bySign.bestFromDays'),
-        bestToDays: t('imports:template.bySign.bestToDays'),
-        otherSigns: t('imports:template.bySign.otherSigns'),
-      },
-      byDay: {
-        titleOfficer: t('imports:template.byDay.title'),
-        kind: t('imports:template.byDay.kind'),
-        bestFrom: t('imports:template.byDay.bestFrom'),
-        bestTo: t('imports:template.byDay.bestTo'),
-      },
-    };
-    return {
-      titleOf,
-      titlesOf: (column) => [titleOf(column), ...t(`imports:alias.${column}`).split('|')],
-      examples: [bySign, byDay],
-    };
-  }, [t]);
+    const order = new Set<string>([own, ...(isLoaded ? LANGUAGES : []), DEFAULT_LANGUAGE]);
+    return columnWordsOf(
+      [...order].map((language): ColumnTexts => {
+        const texts = (namespace: 'imports' | 'files') =>
+          i18n.hasResourceBundle(language, namespace)
+            ? (i18n.getResourceBundle(language, namespace) as unknown)
+            : {};
+        return {
+          imports: texts('imports') as ColumnTexts['imports'],
+          files: texts('files') as ColumnTexts['files'],
+        };
+      }),
+    );
+  }, [i18n, own, isLoaded]);
 }

@@ -1,17 +1,27 @@
 import { describe, expect, it } from 'vitest';
 import { dateCell, type DateCell, type ImportDateFacts } from '#shared/calendar/import-dates.js';
-import { IMPORT_WORDS, SEASONS } from '#server/features/imports/import-words.js';
+import { en } from '#shared/locales/index.js';
+import { TABLE_WORDS } from '#server/features/imports/import-words.js';
 
 const FACTS: ImportDateFacts = {
-  words: IMPORT_WORDS,
+  words: TABLE_WORDS.dates,
   dayOrder: null,
   calendarYear: 2027,
   markerKeyOf: new Map([
     ['pleiades', 'pleiades'],
     ['sirius', 'hr2491'],
   ]),
-  signKeyOf: SEASONS,
+  natureSigns: new Map([['birch leaf', 'Birch leaf']]),
+  latitudeDeg: 60,
 };
+const FIRST_MORNING = { markerKey: 'pleiades', phenomenon: 'heliacal-rising' };
+const DUE_SOUTH = {
+  ...{ type: 'sky', occurrence: 1 },
+  spec: { kind: 'due-meridian', markerKey: 'pleiades', facing: 'south', solarHour: 21 },
+};
+type Tree = { readonly [part: string]: string | Tree };
+const leavesOf = (tree: Tree): string[] =>
+  Object.values(tree).flatMap((value) => (typeof value === 'string' ? [value] : leavesOf(value)));
 const read = (text: string, changes: Partial<ImportDateFacts> = {}): DateCell =>
   dateCell(text, { ...FACTS, ...changes });
 const day = (month: number, first: number, last = first, year: number | null = null) => ({
@@ -77,11 +87,63 @@ describe('a cell that says when', () => {
     expect(read(text)).toEqual({ kind: 'sign', sign: { type: 'star', markerKey, phenomenon }, offsetDays });
   });
 
-  it('reads the turns of the Sun', () => {
-    expect(read('June solstice +3')).toEqual({
-      ...{ kind: 'sign', offsetDays: 3 },
-      sign: { type: 'other', signKey: 'june-solstice' },
-    });
+  const sky = (spec: object, occurrence = 1) => ({ type: 'sky', spec, occurrence });
+  it.each([
+    ['June solstice +3', sky({ kind: 'sun-season', season: 'june-solstice' }), 3],
+    ['Pleiades due south at 21:00 by the Sun', DUE_SOUTH, 0],
+    ['pleiades DUE SOUTH at 21.00 local sun time −4', DUE_SOUTH, -4],
+    [
+      'Noon Sun back over South Ridge',
+      sky({ kind: 'noon-sun', passage: 'back', ridgeName: 'South Ridge' }),
+      0,
+    ],
+    ['Full Moon 4', sky({ kind: 'moon-phase', event: 'full' }, 4), 0],
+    [
+      'Last star night (Sun no deeper than 6 degrees)',
+      sky({ kind: 'dark-night', end: 'last', depthDeg: 6 }),
+      0,
+    ],
+    [
+      'New Moon number 2 from the Pleiades, first morning seen',
+      sky({ ...{ kind: 'moon-counted', event: 'new' }, ...FIRST_MORNING, count: 2 }),
+      0,
+    ],
+    [
+      'Sunrise in the east-north-east, at 70°',
+      sky({ kind: 'sun-azimuth', event: 'sunrise', azimuthDeg: 70, pointName: '' }),
+      0,
+    ],
+    ['actual date of A-04', { type: 'entry', name: 'A-04', day: 'actual' }, 0],
+    ['End of Sow the first field + 10', { type: 'entry', name: 'Sow the first field', day: 'bestTo' }, 10],
+    ['birch leaf +2', { type: 'nature', name: 'Birch leaf' }, 2],
+    ['sign of nature: Geese go north', { type: 'nature', name: 'Geese go north' }, 0],
+  ])('reads %j as another sign', (text, sign, offsetDays) => {
+    expect(read(text)).toEqual({ kind: 'sign', sign, offsetDays });
+  });
+
+  it('reads back every name that the product itself gives to a sign of the sky', () => {
+    const names = leavesOf(en.sky.sign).map((text) =>
+      text
+        .replace('{{star}}', 'Pleiades')
+        .replace('{{phenomenon}}', en.sky.phenomenon['heliacal-rising'])
+        .replace('{{hour}}', '4:30')
+        .replace('{{point}}', 'the notch')
+        .replace('{{ridge}}', 'the ridge')
+        .replace('{{compass}}', 'east')
+        .replace(/\{\{\w+\}\}/gu, '6'),
+    );
+    const unread = names.filter((name) => read(name).kind !== 'sign');
+    // A point on the skyline alone does not say where it is.
+    expect(unread).toEqual(['Sunrise over the notch', 'Sunset over the notch']);
+    expect(read('Sunrise over the notch')).toEqual(problem('direction-missing'));
+  });
+
+  it('takes spring for what it is on that side of the Earth, and asks near the equator', () => {
+    const season = (latitudeDeg: number, text = 'Spring equinox') => read(text, { latitudeDeg });
+    expect(season(40)).toMatchObject({ sign: { spec: { season: 'march-equinox' } } });
+    expect(season(-40)).toMatchObject({ sign: { spec: { season: 'september-equinox' } } });
+    expect(season(-40, 'Midsummer day')).toMatchObject({ sign: { spec: { season: 'december-solstice' } } });
+    expect(season(12)).toEqual(problem('which-season'));
   });
 
   it('says what is the matter with the rest', () => {

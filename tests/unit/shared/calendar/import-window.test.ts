@@ -1,17 +1,18 @@
 import { describe, expect, it } from 'vitest';
 import { dateCell, type ImportDateFacts } from '#shared/calendar/import-dates.js';
 import { WINDOW_DAYS, windowOfCells } from '#shared/calendar/import-window.js';
-import { IMPORT_WORDS, SEASONS } from '#server/features/imports/import-words.js';
+import { TABLE_WORDS } from '#server/features/imports/import-words.js';
 
 const FACTS: ImportDateFacts = {
-  words: IMPORT_WORDS,
+  words: TABLE_WORDS.dates,
   dayOrder: null,
   calendarYear: 2027,
   markerKeyOf: new Map([
     ['pleiades', 'pleiades'],
     ['sirius', 'hr2491'],
   ]),
-  signKeyOf: SEASONS,
+  natureSigns: new Map([['birch leaf', 'Birch leaf']]),
+  latitudeDeg: 60,
 };
 const read = (text: string) => dateCell(text, FACTS);
 

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { columnWordsOf } from '#src/features/imports/model/column-words.js';
 import {
   guessColumns,
   keptMatching,
@@ -11,10 +12,7 @@ import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
 import { IMPORT_COLUMNS, type ImportColumn } from '#shared/contracts/imports.js';
 import { en } from '#shared/locales/index.js';
 
-const titlesOf = (column: ImportColumn) => [
-  column === 'when' ? en.imports.column.when : en.files.calendarCsv.column[column],
-  ...en.imports.alias[column].split('|'),
-];
+const { titlesOf } = columnWordsOf([en]);
 
 describe('columns that a table may have', () => {
   it('are those of our own CSV that make an entry, its days, and one for words', () => {
