@@ -12,6 +12,7 @@ import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-rep
 import { PreparedReply } from './reply.js';
 import { sameSession } from './same-session.js';
 import { withUpload, type UploadedFile } from './upload.js';
+import { sha256OfFile } from './file-hash.js';
 import { writeKeyOf } from './write-key.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;
@@ -77,7 +78,7 @@ export class Mount {
     this.add(endpoint, async (request, call) => {
       const actor = await this.actor(endpoint, request);
       if (endpoint.method === 'GET') looksOnly(actor);
-      const key = writeKeyOf(endpoint, request, actor);
+      const key = writeKeyOf(endpoint, request, actor, request.body);
       return withHandOf(actor, () => withWriteKey(key, () => handler(call(), actor)));
     });
   }
@@ -88,9 +89,13 @@ export class Mount {
     if (access.kind !== 'member' || upload === null) throw new TypeError(`${endpoint.id} takes no file`);
     this.add(endpoint, async (request, _call, response) => {
       const actor = await this.actor(endpoint, request);
-      return withUpload({ request, response, folder: this.waitingFolder, upload }, ({ meta, file }) =>
-        withHandOf(actor, () => handler(parseInput(endpoint, request, meta), actor, file)),
-      );
+      return withUpload({ request, response, folder: this.waitingFolder, upload }, async ({ meta, file }) => {
+        const asked = endpoint.countsOnce ? [meta, await sha256OfFile(file.path)] : null;
+        const key = writeKeyOf(endpoint, request, actor, asked);
+        return withHandOf(actor, () =>
+          withWriteKey(key, () => handler(parseInput(endpoint, request, meta), actor, file)),
+        );
+      });
     });
   }
 

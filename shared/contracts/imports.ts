@@ -4,9 +4,6 @@ import { entryLead, entryWarning, entryWindow } from './calendars.js';
 import { id } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
 
-/** Made by whoever sends: what is sent twice under one key is brought in once. */
-const key = z.uuid();
-
 /** What a calendar's own file brought in, or would bring in. */
 export const fileImport = z.strictObject({
   added: z.number().int(),
@@ -75,7 +72,6 @@ export const tableLine = z.strictObject({
 export type TableLine = z.infer<typeof tableLine>;
 
 export const tableInput = z.strictObject({
-  key,
   dryRun: z.boolean(),
   /** How `6/7` is meant; null where the table has no such days, or nobody has said so yet. */
   dayOrder: z.enum(['day-first', 'month-first']).nullable(),
@@ -144,9 +140,10 @@ export const importsEndpoints = {
     summary: 'Bring a calendar’s JSON file back into a draft of its village; with dryRun nothing is kept',
     access: member('calendar', 'officer'),
     params,
-    body: z.strictObject({ key, dryRun: z.boolean() }),
+    body: z.strictObject({ dryRun: z.boolean() }),
     upload: { maxBytes: CALENDAR_FILE_MAX_BYTES },
     response: fileImport,
+    countsOnce: true,
   }),
   table: defineEndpoint({
     id: 'importTable',
@@ -158,6 +155,7 @@ export const importsEndpoints = {
     params,
     body: tableInput,
     response: tableImport,
+    countsOnce: true,
   }),
   copy: defineEndpoint({
     id: 'copyCalendar',
@@ -167,7 +165,8 @@ export const importsEndpoints = {
       'Copy the draft into a draft of another village of the same officer; with dryRun nothing is kept',
     access: member('calendar', 'officer'),
     params,
-    body: z.strictObject({ key, dryRun: z.boolean(), toCalendarId: id }),
+    body: z.strictObject({ dryRun: z.boolean(), toCalendarId: id }),
     response: villageCopy,
+    countsOnce: true,
   }),
 } as const;

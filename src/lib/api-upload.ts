@@ -1,4 +1,5 @@
 import type { Endpoint } from '#shared/contracts/endpoint.js';
+import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { apiUrl, renewCsrfToken, type CallInput, type CallResult } from './api-client.js';
 import { ApiProblem, readProblem } from './api-problem.js';
 import { csrfToken } from './csrf.js';
@@ -11,6 +12,7 @@ export type UploadInput<E extends Endpoint> = CallInput<E> & {
 
 interface LooseInput {
   body?: unknown;
+  writeKey?: string | undefined;
   file: Blob;
   onProgress?: ((sentBytes: number, ofBytes: number) => void) | undefined;
   signal?: AbortSignal | undefined;
@@ -45,7 +47,7 @@ export async function uploadToApi<E extends Endpoint>(
 
 function send(
   address: string,
-  { body, file, onProgress, signal }: LooseInput,
+  { body, writeKey, file, onProgress, signal }: LooseInput,
   token: string,
 ): Promise<Response> {
   return new Promise((resolve, reject) => {
@@ -63,6 +65,7 @@ function send(
     request.open('POST', address);
     request.setRequestHeader('Accept', 'application/json');
     request.setRequestHeader('X-CSRF-Token', token);
+    if (writeKey !== undefined) request.setRequestHeader(WRITE_KEY_HEADER, writeKey);
     request.upload.addEventListener('progress', ({ loaded, total }) => onProgress?.(loaded, total));
     request.addEventListener('load', () => {
       const type = request.getResponseHeader('Content-Type') ?? '';

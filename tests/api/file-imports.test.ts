@@ -5,6 +5,7 @@ import type { Entry } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
+import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
@@ -47,11 +48,13 @@ const exported = async (calendarId: string, number = 'draft') =>
   (await village.officer.get(`/api/calendars/${calendarId}/versions/${number}/calendar.json`).expect(200))
     .body as CalendarFile;
 const send = (client: Client, file: unknown, { into = intoId, key = randomUUID(), dryRun = false } = {}) =>
-  client.upload(
-    `/api/calendars/${into}/imports/file`,
-    { key, dryRun },
-    Buffer.from(typeof file === 'string' ? file : JSON.stringify(file)),
-  );
+  client
+    .upload(
+      `/api/calendars/${into}/imports/file`,
+      { dryRun },
+      Buffer.from(typeof file === 'string' ? file : JSON.stringify(file)),
+    )
+    .set(WRITE_KEY_HEADER, key);
 const bringIn = async (file: unknown, options = {}) =>
   (await send(village.officer, file, options).expect(200)).body as FileImport;
 const draftOf = (calendarId = intoId) => entriesOf(village.officer, calendarId);
@@ -107,7 +110,9 @@ describe('a file that comes back', () => {
       'There before',
       'Sow long millet',
     ]);
-    expect(reasonOf(await send(village.officer, file, { key, into: fromId }))).toBe('409 key-used');
+    expect(reasonOf(await send(village.officer, file, { key, into: fromId }))).toBe('409 write-key-used');
+    const other = await exported(intoId);
+    expect(reasonOf(await send(village.officer, other, { key }))).toBe('409 write-key-used');
     expect(reasonOf(await send(village.officer, file))).toBe('409 draft-locked');
   });
 

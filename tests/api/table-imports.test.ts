@@ -7,6 +7,7 @@ import type { Problem } from '#shared/contracts/problem.js';
 import { CalendarEntity } from '#server/db/entities/calendar.entity.js';
 import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
 import { daysBetween } from '#shared/kernel/iso-date.js';
+import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { en } from '#shared/locales/index.js';
 import { columnWordsOf } from '#src/features/imports/model/column-words.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
@@ -42,13 +43,13 @@ const SOW = {
   ...{ bestFromDays: '7', bestToDays: '23' },
 };
 const input = (lines: TableLine[], changes: Partial<TableInput> = {}): TableInput => ({
-  ...{ key: randomUUID(), dryRun: false, dayOrder: null, natureSigns: [], lines },
+  ...{ dryRun: false, dayOrder: null, natureSigns: [], lines },
   ...changes,
 });
-const send = (calendarId: string, body: TableInput, client: Client = village.officer) =>
-  client.post(`/api/calendars/${calendarId}/imports/table`, body);
-const sent = async (calendarId: string, body: TableInput) =>
-  (await send(calendarId, body).expect(200)).body as TableImport;
+const send = (calendarId: string, body: TableInput, client: Client = village.officer, key = randomUUID()) =>
+  client.post(`/api/calendars/${calendarId}/imports/table`, body).set(WRITE_KEY_HEADER, key);
+const sent = async (calendarId: string, body: TableInput, key = randomUUID()) =>
+  (await send(calendarId, body, village.officer, key).expect(200)).body as TableImport;
 
 const { titlesOf } = columnWordsOf([en]);
 const linesOf = (text: string) => {
@@ -97,10 +98,14 @@ describe('a table', () => {
   it('comes in once, however often and however much at once it is sent', async () => {
     const calendarId = await begin();
     const body = input([line(SOW)]);
-    await Promise.all([sent(calendarId, body), sent(calendarId, body), sent(calendarId, body)]);
-    expect(await sent(calendarId, body)).toEqual({ added: 1, lines: [] });
+    const key = randomUUID();
+    const again = () => sent(calendarId, body, key);
+    await Promise.all([again(), again(), again()]);
+    expect(await again()).toEqual({ added: 1, lines: [] });
     expect(await entriesOf(village.officer, calendarId)).toHaveLength(1);
-    expect(reasonOf(await send(await begin(), body))).toBe('409 key-used');
+    const other = input([line({ ...SOW, titleOfficer: 'Reap' })]);
+    expect(reasonOf(await send(calendarId, other, village.officer, key))).toBe('409 write-key-used');
+    expect(reasonOf(await send(await begin(), body, village.officer, key))).toBe('409 write-key-used');
   });
 
   it('lands as a draft of the village behind what is there, beliefs with the elders, and nobody has agreed', async () => {

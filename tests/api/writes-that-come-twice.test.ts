@@ -3,6 +3,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
+import { OneKindOfKeys1799600000000 } from '#server/db/migrations/1799600000000-one-kind-of-keys.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -154,5 +155,34 @@ describe('a key', () => {
     const rows = JSON.stringify(await api.dataSource.query('SELECT * FROM write_key'));
     expect(rows).toContain(officer.personId);
     expect(rows).not.toMatch(new RegExp(`Zqword|${key}`, 'u'));
+  });
+});
+
+describe('what was brought in before it counted in the same list', () => {
+  it('is known by its key after the lists were made one, and not brought in again', async () => {
+    const key = newKey();
+    const lists = new OneKindOfKeys1799600000000();
+    const runner = api.dataSource.createQueryRunner();
+    try {
+      await lists.down(runner);
+      await runner.query(
+        'INSERT INTO calendar_import (import_key, calendar_id, brought_by, brought_at, added, refused) VALUES (?, ?, ?, NOW(), 3, 1)',
+        [key, calendarId, officer.personId],
+      );
+      await lists.up(runner);
+      await lists.up(runner);
+    } finally {
+      await runner.release();
+    }
+    const body = {
+      ...{ dryRun: false, dayOrder: null, natureSigns: [] },
+      lines: [{ line: 2, cells: { titleOfficer: 'Mend', kind: 'farm', bestFrom: '06-07' } }],
+    };
+    const bring = (id: string) =>
+      officer.post(`/api/calendars/${id}/imports/table`, body).set(WRITE_KEY_HEADER, key);
+    expect((await bring(calendarId).expect(200)).body).toEqual({ added: 3, lines: [] });
+    expect(await titles()).toEqual([]);
+    const other = (await beginCalendar(village, 2099)).id;
+    expect(reasonOf(await bring(other))).toBe('409 write-key-used');
   });
 });

@@ -181,13 +181,13 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
     putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
-    importCalendarFile: () => ({ key: randomUUID(), dryRun: true }),
+    importCalendarFile: () => ({ dryRun: true }),
     importTable: () => ({
-      ...{ key: randomUUID(), dryRun: true, dayOrder: null, natureSigns: [] },
+      ...{ dryRun: true, dayOrder: null, natureSigns: [] },
       lines: [{ line: 2, cells: { titleOfficer: 'Mend', kind: 'farm', bestFrom: '06-07' } }],
     }),
     // To itself, which is refused once somebody may copy at all.
-    copyCalendar: () => ({ key: randomUUID(), dryRun: true, toCalendarId: village.calendarId }),
+    copyCalendar: () => ({ dryRun: true, toCalendarId: village.calendarId }),
     switchOpenPageOn: () => ({ placeShown: 'name' }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),

@@ -26,7 +26,6 @@ import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
 import { OpenPageEntity } from './open-page.entity.js';
-import { CalendarImportEntity } from './calendar-import.entity.js';
 import { RolledItemEntity } from './rolled-item.entity.js';
 import { RolloverEntity } from './rollover.entity.js';
 import { VersionEntryEntity } from './version-entry.entity.js';
@@ -88,7 +87,6 @@ export const ENTITIES = [
   ConsentEntity,
   RolloverEntity,
   RolledItemEntity,
-  CalendarImportEntity,
   OpenPageEntity,
   WriteKeyEntity,
 ];

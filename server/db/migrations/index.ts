@@ -26,6 +26,7 @@ import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.j
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 import { WordLists1799300000000 } from './1799300000000-word-lists.js';
+import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -57,4 +58,5 @@ export const MIGRATIONS = [
   RestoredEntries1799110000000,
   WriteKeys1799200000000,
   WordLists1799300000000,
+  OneKindOfKeys1799600000000,
 ];

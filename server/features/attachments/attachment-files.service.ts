@@ -1,9 +1,9 @@
-import { createHash, randomBytes } from 'node:crypto';
+import { randomBytes } from 'node:crypto';
 import { createReadStream } from 'node:fs';
 import { Readable } from 'node:stream';
-import { pipeline } from 'node:stream/promises';
 import { PICTURE_MAX_BYTES } from '#shared/contracts/attachments.js';
 import { AppError, conflict, invalidField } from '../../http/app-error.js';
+import { sha256OfFile } from '../../http/file-hash.js';
 import { drawAnew } from '../../media/picture-file.js';
 import { soundTypeOf } from '../../media/sound-file.js';
 import type { FileScan } from '../../storage/file-scan.js';
@@ -43,7 +43,7 @@ export class AttachmentFilesService {
     const contentType = await soundTypeOf(path);
     if (contentType === null) throw invalidField('file', 'not-a-recording');
     const storageKey = await this.put(createReadStream(path));
-    return { storageKey, thumbnailKey: null, contentType, bytes, sha256: await sha256Of(path) };
+    return { storageKey, thumbnailKey: null, contentType, bytes, sha256: await sha256OfFile(path) };
   }
 
   /** Keeps the picture drawn anew, and a small one; the file that came is thrown away. */
@@ -62,7 +62,7 @@ export class AttachmentFilesService {
       thumbnailKey,
       contentType: 'image/jpeg',
       bytes: drawn.picture.length,
-      sha256: await sha256Of(path),
+      sha256: await sha256OfFile(path),
       widthPx: drawn.widthPx,
       heightPx: drawn.heightPx,
     };
@@ -84,10 +84,4 @@ export class AttachmentFilesService {
     await this.store.put(content, key);
     return key;
   }
-}
-
-export async function sha256Of(path: string): Promise<string> {
-  const hash = createHash('sha256');
-  await pipeline(createReadStream(path), hash);
-  return hash.digest('hex');
 }

@@ -14,6 +14,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { sha256OfFile } from '../../http/file-hash.js';
 import { personNames } from '../people/person-names.service.js';
 import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
@@ -22,7 +23,6 @@ import type { WithdrawalsService } from '../withdrawals/withdrawals.service.js';
 import { mayRemove, type SeenAttachment } from './attachment-access.service.js';
 import { recordAttachment } from './attachment-audit.js';
 import {
-  sha256Of,
   type AttachmentFilesService,
   type IncomingFile,
   type KeptFile,
@@ -101,7 +101,7 @@ export class AttachmentsService {
     if (row.kind !== 'recording') throw conflict('part-missing');
     const there = row.parts.find(({ part }) => part === input.part);
     if (there !== undefined) {
-      if (there.sha256 !== (await sha256Of(file.path))) throw conflict('part-differs');
+      if (there.sha256 !== (await sha256OfFile(file.path))) throw conflict('part-differs');
       return this.describeOwn(actor, row);
     }
     if (!row.parts.some(({ part }) => part === input.part - 1)) throw conflict('part-missing');

@@ -19,7 +19,6 @@ import { copiedEntries, type CopiedEntry } from './copied-entry.js';
 import { landOnce, type LandingEntry } from './landing.service.js';
 
 interface Copying {
-  key: string;
   dryRun: boolean;
   toCalendarId: string;
 }
@@ -33,7 +32,7 @@ export class CopyingService {
     private readonly contents: FrozenContentService,
   ) {}
 
-  async copy(actor: Actor, calendarId: string, { key, dryRun, toCalendarId }: Copying): Promise<VillageCopy> {
+  async copy(actor: Actor, calendarId: string, { dryRun, toCalendarId }: Copying): Promise<VillageCopy> {
     const { manager } = this.dataSource;
     const { to, theirs } = await this.target(manager, actor, toCalendarId);
     // What files may hold, whoever takes them: nothing kept, and nothing that was not agreed to.
@@ -51,7 +50,7 @@ export class CopyingService {
     }
     const at = this.clock.now();
     const { added } = await inTransaction(this.dataSource, async (within) => {
-      const landed = await landOnce(within, theirs, toCalendarId, { key, at }, () =>
+      const landed = await landOnce(within, theirs, toCalendarId, at, () =>
         Promise.resolve({ way: 'village', entries: [...landing.values()], refused: 0 }),
       );
       if (landed.isNew) await recordCopied(within, actor, calendarId, landed.added, at);

@@ -39,7 +39,7 @@ export class FileImportService {
   async bringIn(
     actor: Actor,
     calendarId: string,
-    { key, dryRun }: { key: string; dryRun: boolean },
+    { dryRun }: { dryRun: boolean },
     uploaded: IncomingFile,
   ): Promise<FileImport> {
     const file = readCalendarFile(await readFile(uploaded.path, 'utf8'));
@@ -59,7 +59,7 @@ export class FileImportService {
     }
     const at = this.clock.now();
     const { added, refused } = await inTransaction(this.dataSource, (manager) =>
-      landOnce(manager, actor, calendarId, { key, at }, async ({ year }) => ({
+      landOnce(manager, actor, calendarId, at, async ({ year }) => ({
         ...(await this.plan(manager, actor, year, file, listed)),
         way: 'file',
       })),

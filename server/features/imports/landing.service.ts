@@ -2,7 +2,6 @@ import { ENTRIES_MAX, type EntryInput } from '#shared/contracts/calendars.js';
 import type { VariantInput } from '#shared/contracts/variants.js';
 import { randomUUID } from 'node:crypto';
 import type { EntityManager } from 'typeorm';
-import { CalendarImportEntity } from '../../db/entities/calendar-import.entity.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { ConsentEntity, type ConsentDetails } from '../../db/entities/consent.entity.js';
 import { EntryVariantEntity } from '../../db/entities/entry-variant.entity.js';
@@ -15,6 +14,7 @@ import { settleShownUntil } from '../../policy/consent.repository.js';
 import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
+import { countedOnce } from '../calendars/count-once.service.js';
 import { roomAtTheEnd } from '../calendars/draft-order.service.js';
 import { withSignsOfThisVillage } from '../signs/entry-signs.service.js';
 import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
@@ -47,31 +47,28 @@ export interface Landing {
 }
 
 /**
- * Puts entries behind those of an open draft, all or none, once for each key. `prepare` is asked only where the key is
- * new, with the calendar locked; what it throws keeps everything as it was.
+ * Puts entries behind those of an open draft, all or none, once for each key of a write. `prepare` is asked only where the
+ * key is new, with the calendar locked; what it throws keeps everything as it was.
  */
 export async function landOnce(
   manager: EntityManager,
   actor: Actor,
   calendarId: string,
-  { key, at }: { key: string; at: Date },
+  at: Date,
   prepare: (calendar: CalendarEntity) => Promise<Landing>,
 ): Promise<Landed> {
   const calendar = await lockCalendar(manager, calendarId);
-  const known = await manager.findOneBy(CalendarImportEntity, { importKey: key });
-  if (known !== null) {
-    if (known.calendarId !== calendarId || known.broughtBy !== actor.person.id) throw conflict('key-used');
-    return { isNew: false, added: known.added, refused: known.refused };
-  }
-  if (calendar.outNumber !== null) throw new AppError('draft-locked');
-  const landing = await prepare(calendar);
-  await land(manager, actor, calendar, landing, at);
-  const counts = { added: landing.entries.length, refused: landing.refused };
-  await manager.insert(CalendarImportEntity, {
-    ...{ importKey: key, calendarId, broughtBy: actor.person.id, broughtAt: at },
-    ...counts,
+  const { isNew, resultId, counts } = await countedOnce(manager, actor, at, async () => {
+    if (calendar.outNumber !== null) throw new AppError('draft-locked');
+    const landing = await prepare(calendar);
+    await land(manager, actor, calendar, landing, at);
+    return {
+      resultId: calendarId,
+      counts: { added: landing.entries.length, refused: landing.refused },
+    };
   });
-  return { isNew: true, ...counts };
+  if (resultId !== calendarId) throw conflict('write-key-used');
+  return { isNew, ...counts };
 }
 
 async function land(

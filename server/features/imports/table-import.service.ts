@@ -48,7 +48,7 @@ export class TableImportService {
     const at = this.clock.now();
     let lines: ReadLine[] = [];
     const { added } = await inTransaction(this.dataSource, (within) =>
-      landOnce(within, actor, calendarId, { key: input.key, at }, async () => {
+      landOnce(within, actor, calendarId, at, async () => {
         const read = await this.read(within, actor, calendar, input);
         expectAllGood(read.lines);
         lines = read.lines;

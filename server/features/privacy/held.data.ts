@@ -46,7 +46,6 @@ export const HELD: Readonly<Record<string, Held>> = {
   entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
   rollover: row('knowledge', ['rolled_by'], ['calendar_id', 'rolled_at']),
   open_page: row('knowledge', ['switched_by'], ['community_id', 'switched_on_at'], ['page_key']),
-  calendar_import: row('knowledge', ['brought_by'], ['calendar_id', 'brought_at', 'added']),
   rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   sign: row('knowledge', ['updated_by'], ['id', 'updated_at']),
@@ -72,6 +71,11 @@ export const HELD: Readonly<Record<string, Held>> = {
     ['id', 'at', 'action', 'subject_type', 'subject_id'],
   ),
   kept_read: row('records', ['person_id'], 'all'),
-  write_key: row('sending-again', ['person_id'], ['result_id', 'done_at'], ['key_hash', 'call_hash']),
+  write_key: row(
+    'sending-again',
+    ['person_id'],
+    ['result_id', 'done_at', 'counts'],
+    ['key_hash', 'call_hash'],
+  ),
   withdrawal: row('taking-back', ['asked_by', 'done_by'], ['id', 'item_type', 'at', 'asked_by', 'done_by']),
 };

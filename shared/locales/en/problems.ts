@@ -41,7 +41,8 @@ export const texts = {
     'no-entries': 'The draft has no entries yet. Add one before you submit it.',
     'contacts-missing':
       'Weather and agriculture contacts are missing. The steward fills them in under Village, Settings.',
-    'write-key-used': 'This came with the key of something else. Load the page again and try once more.',
+    'write-key-used':
+      'This was sent before with other words, and counted then. Load the page again and look at what is there.',
     'submission-out': 'A submission is out already. Take it back first.',
     'not-in-review': 'This submission is not in review any more.',
     'not-signed-off': 'Only a signed-off submission can be published.',
@@ -87,7 +88,6 @@ export const texts = {
     'no-change-asked': 'Only the elder who asked for a change can let it stand.',
     'same-village':
       'Both calendars are of one village. Take the calendar along whole (JSON) and bring that file in.',
-    'key-used': 'This was sent for another calendar already. Choose the file again.',
     'other-file-version':
       'This file is of another form than is read here. Export it anew, or bring Dawnpeg up to date.',
     'file-changed':

@@ -23,7 +23,10 @@ export function useFileImport(calendarId: string) {
   const refresh = useRefresh(calendarId);
   return useMutation({
     mutationFn: ({ file, key, dryRun, signal }: FileSending): Promise<FileImport> =>
-      uploadToApi(importsEndpoints.file, { params: { calendarId }, body: { key, dryRun }, file, signal }),
+      uploadToApi(importsEndpoints.file, {
+        ...{ params: { calendarId }, body: { dryRun }, file, signal },
+        writeKey: dryRun ? undefined : key,
+      }),
     onSettled: refresh,
   });
 }
@@ -31,11 +34,17 @@ export function useFileImport(calendarId: string) {
 export function useTableImport(calendarId: string) {
   const refresh = useRefresh(calendarId);
   return useMutation({
-    mutationFn: ({ signal, ...body }: TableInput & { signal: AbortSignal }): Promise<TableImport> =>
-      callApi(importsEndpoints.table, { params: { calendarId }, body, signal }),
+    mutationFn: ({ signal, key, ...body }: TableSending): Promise<TableImport> =>
+      callApi(importsEndpoints.table, {
+        ...{ params: { calendarId }, body, signal },
+        writeKey: body.dryRun ? undefined : key,
+      }),
     onSettled: refresh,
   });
 }
+
+/** Under a key of its own, too. */
+type TableSending = TableInput & { key: string; signal: AbortSignal };
 
 export interface CopySending {
   toCalendarId: string;
@@ -47,8 +56,11 @@ export interface CopySending {
 export function useCopy(calendarId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ signal, ...body }: CopySending): Promise<VillageCopy> =>
-      callApi(importsEndpoints.copy, { params: { calendarId }, body, signal }),
+    mutationFn: ({ signal, key, ...body }: CopySending): Promise<VillageCopy> =>
+      callApi(importsEndpoints.copy, {
+        ...{ params: { calendarId }, body, signal },
+        writeKey: body.dryRun ? undefined : key,
+      }),
     onSettled: (_answer, _problem, { toCalendarId, dryRun }) =>
       dryRun ? undefined : client.invalidateQueries({ queryKey: calendarKeys.one(toCalendarId) }),
   });
