@@ -54,6 +54,7 @@ import { WeatherService } from './features/weather/weather.service.js';
 import { wordListsRoutes } from './features/word-lists/word-lists.routes.js';
 import { WordListsService } from './features/word-lists/word-lists.service.js';
 import { signsRoutes } from './features/signs/signs.routes.js';
+import { OwnSightingsService } from './features/signs/own-sightings.service.js';
 import { SignsService } from './features/signs/signs.service.js';
 import { figuresRoutes } from './features/figures/figures.routes.js';
 import { FiguresService } from './features/figures/figures.service.js';
@@ -241,7 +242,7 @@ export function createApp(options: AppOptions): App {
   figuresRoutes(mount, new FiguresService(dataSource, clock));
   const weather = new WeatherService(dataSource, clock);
   weatherRoutes(mount, weather);
-  signsRoutes(mount, new SignsService(dataSource, clock));
+  signsRoutes(mount, new SignsService(dataSource, clock), new OwnSightingsService(dataSource, clock));
   wordListsRoutes(mount, new WordListsService(dataSource, clock));
   starsRoutes(mount, stars, new SkylineEffectsService(places, skyYears));
   moonsRoutes(mount, new MoonsService(places, skyYears));

@@ -83,6 +83,11 @@ export function isLookedAt({ level, season, consent }: Combination): boolean {
 }
 const looked = (rule: Rule): Rule => both((_person, thing) => isLookedAt(thing), rule);
 
+/** Entries with a sign in their own words, which was seen. */
+export function hasOwnSign({ season, consent }: Combination): boolean {
+  return season === 'none' && consent === 'nobody asked';
+}
+
 /** Figures whose sky is asked for one by one. */
 export function isAskedFigure({ level, season, consent }: Combination): boolean {
   if (season !== 'none') return false;
@@ -125,6 +130,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   listFigures: { figure: sees, story: sees },
   readFigure: { figure: sees, story: sees, 'led entry': keptSeen },
   listSigns: { sign: sees },
+  listOwnSignsSeen: { entry: both(sees, (_person, thing) => hasOwnSign(thing)) },
   listEntries: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
   listVariants: { variant: keptSeen, 'kept variant': keptSeen },
   // The officer who rolled over neither sees nor counts what is kept.
@@ -175,7 +181,11 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   // What an elder asks the officer to change stands among what waits.
   readToday: { entry: sees, answer: both((person) => person === 'officer', sees) },
   // What somebody wrote and brought is theirs to have, also while it is hidden.
-  exportOwnData: { note: bringers, recording: bringers, 'picture title': bringers },
+  exportOwnData: {
+    ...{ note: bringers, recording: bringers, 'picture title': bringers },
+    // Who saw a sign, as the person marked it.
+    entry: both(bringers, (_person, thing) => hasOwnSign(thing)),
+  },
 };
 
 /** Why an endpoint holds nothing of what is planted. Every other one has its line above, or a test says so. */

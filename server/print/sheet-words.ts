@@ -90,6 +90,10 @@ export function sheetWords({ translate: t, language, year, villageMonths }: Shee
       needed === null || needed < 1
         ? t('entry.signs', { signs: end(signs) })
         : t('entry.signsSome', { signs: end(signs), count: needed }),
+    tickSigns: ({ count, mustHave }) =>
+      mustHave === ''
+        ? t('entry.tickSigns', { count })
+        : t('entry.tickSignsMust', { count, name: end(mustHave) }),
     ifLate: (rule) => t('entry.ifLate', { rule: end(rule) }),
     takeCare: (caution) => t('entry.takeCare', { caution: end(caution) }),
     notice: ({ text, issuer, issued, expires }) =>

@@ -1,8 +1,14 @@
 import type { EntryWindow } from './entry-model.js';
 import { dayNumberFromIso, dayNumberOf } from '../kernel/iso-date.js';
 
+/** How a sign is told from others: one of the village's list, or one in the entry's own words once it was saved. */
+export interface CountedSign {
+  sharedId?: string | undefined;
+  ownId?: string | undefined;
+}
+
 /** Signs for which an event waits, as far as counting them is asked. */
-export interface AwaitedSigns<S extends { sharedId?: string | undefined }> {
+export interface AwaitedSigns<S extends CountedSign> {
   list: readonly S[];
   needed: number | null;
   mustHave: number | null;
@@ -34,7 +40,7 @@ export function spanOfSeen(
 }
 
 export interface SignsIn {
-  /** For each sign of the list, whether it is in; null where it cannot be marked, because it is no sign of the village's list. */
+  /** For each sign of the list, whether it is in; null where it cannot be marked: taken out of the village's list, or not saved yet. */
   isIn: (boolean | null)[];
   inCount: number;
   needed: number;
@@ -48,16 +54,16 @@ export interface SignsIn {
 /**
  * How many signs of an event are in. People get ready until the must-have sign and as many as are needed were seen; where
  * no number is said, all are waited for. Null where there is nothing to wait for.
- * @param seenDays day numbers on which each sign of the village's list was seen
+ * @param seenDays day numbers on which each sign was seen, by its id
  */
-export function signsIn<S extends { sharedId?: string | undefined }>(
+export function signsIn<S extends CountedSign>(
   { list, needed, mustHave }: AwaitedSigns<S>,
   seenDays: ReadonlyMap<string, readonly number[]>,
   span: SeenSpan,
 ): SignsIn | null {
   if (list.length === 0) return null;
-  const isIn = list.map(({ sharedId }) => {
-    const days = sharedId === undefined ? undefined : seenDays.get(sharedId);
+  const isIn = list.map(({ sharedId, ownId }) => {
+    const days = sharedId === undefined ? ownDays(seenDays, ownId) : seenDays.get(sharedId);
     if (days === undefined) return null;
     return days.some((day) => span.first <= day && day <= span.last);
   });
@@ -68,11 +74,16 @@ export function signsIn<S extends { sharedId?: string | undefined }>(
   return { isIn, inCount, needed: count, total: list.length, missingMust, state };
 }
 
+/** One that was never seen has no days; one without an id cannot have any. */
+function ownDays(seenDays: ReadonlyMap<string, readonly number[]>, ownId: string | undefined) {
+  return ownId === undefined ? undefined : (seenDays.get(ownId) ?? []);
+}
+
 /**
  * Without some signs of the list. The one that must be there stays the same, and no more are needed than are left.
  * @param stays whether the sign at this place stays
  */
-export function keepingSigns<S extends { sharedId?: string | undefined }>(
+export function keepingSigns<S extends CountedSign>(
   signs: AwaitedSigns<S>,
   stays: (sign: S, place: number) => boolean,
 ): { list: S[]; needed: number | null; mustHave: number | null } {

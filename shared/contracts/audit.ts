@@ -38,6 +38,8 @@ export const AUDIT_ACTIONS = [
   'sign-put-back',
   'sign-seen',
   'sign-seen-taken-back',
+  'own-sign-seen',
+  'own-sign-seen-taken-back',
   'notice-added',
   'notice-removed',
   'rain-written',

@@ -81,8 +81,11 @@ export const signWords = z.strictObject({
   stillSeen: z.enum(STILL_SEEN).nullable(),
 });
 
-/** A sign to look out for before the work begins. One of the village's list is named, and its words stand beside. */
-export const recordSign = signWords.extend({ sharedId: id.optional() });
+/**
+ * A sign to look out for before the work begins. One of the village's list is named, and its words stand beside; one in
+ * the entry's own words has an id of its own once it was saved, so that it can be marked as seen.
+ */
+export const recordSign = signWords.extend({ sharedId: id.optional(), ownId: id.optional() });
 export type RecordSign = z.infer<typeof recordSign>;
 
 /** Who of which office read a text and let it stand, and when. */

@@ -55,12 +55,19 @@ export const sign = signFields.extend({
   updatedBy: z.string(),
   updatedAt: instant,
   version: rowVersion,
+  /** The asking person's to change: of an elder who gave it, else the officers'. */
+  mine: z.boolean(),
 });
 export type Sign = z.infer<typeof sign>;
+
+/** A sign in an entry's own words, and the days on which it was seen: newest first. */
+export const ownSeen = z.strictObject({ entryId: id, ownId: id, seen: z.array(sighting) });
+export type OwnSeen = z.infer<typeof ownSeen>;
 
 const communityParams = z.strictObject({ communityId: id });
 const signParams = z.strictObject({ communityId: id, signId: id });
 const seenParams = z.strictObject({ communityId: id, signId: id, seenId: id });
+const ownParams = z.strictObject({ calendarId: id, entryId: id, ownId: id });
 
 export const signsEndpoints = {
   list: defineEndpoint({
@@ -77,7 +84,7 @@ export const signsEndpoints = {
     method: 'POST',
     path: '/api/communities/:communityId/signs',
     summary: 'Add a sign to the village’s list',
-    access: member('community', 'officer'),
+    access: member('community', 'officer', 'elder'),
     params: communityParams,
     body: signInput,
     response: sign,
@@ -89,7 +96,7 @@ export const signsEndpoints = {
     path: '/api/communities/:communityId/signs/:signId',
     summary:
       'Change a sign and its words in every draft; versions keep theirs; 409 with both states when stale',
-    access: member('community', 'officer'),
+    access: member('community', 'officer', 'elder'),
     params: signParams,
     body: signUpdate,
     response: sign,
@@ -100,7 +107,7 @@ export const signsEndpoints = {
     path: '/api/communities/:communityId/signs/:signId',
     summary:
       'Take a sign out of the list; refused while an entry of a draft waits for it; it can be put back',
-    access: member('community', 'officer'),
+    access: member('community', 'officer', 'elder'),
     params: signParams,
   }),
   restore: defineEndpoint({
@@ -108,7 +115,7 @@ export const signsEndpoints = {
     method: 'POST',
     path: '/api/communities/:communityId/signs/:signId/restore',
     summary: 'Put a sign back that was taken out of the list',
-    access: member('community', 'officer'),
+    access: member('community', 'officer', 'elder'),
     params: signParams,
     response: sign,
   }),
@@ -131,5 +138,34 @@ export const signsEndpoints = {
     access: member('community', ...ROLES),
     params: seenParams,
     response: sign,
+  }),
+  listOwnSeen: defineEndpoint({
+    id: 'listOwnSignsSeen',
+    method: 'GET',
+    path: '/api/communities/:communityId/own-signs-seen',
+    summary: 'When signs in the own words of entries were seen, of the entries that the person sees',
+    access: member('community', ...ROLES),
+    params: communityParams,
+    response: listOf(ownSeen),
+  }),
+  markOwnSeen: defineEndpoint({
+    id: 'markOwnSignSeen',
+    method: 'POST',
+    path: '/api/calendars/:calendarId/entries/:entryId/signs/:ownId/seen',
+    summary: 'Say that a sign in an entry’s own words was seen: on which day and by whom',
+    access: member('calendar', ...ROLES),
+    params: ownParams,
+    body: sightingInput,
+    response: ownSeen,
+    status: 201,
+  }),
+  takeBackOwnSeen: defineEndpoint({
+    id: 'takeBackOwnSignSeen',
+    method: 'DELETE',
+    path: '/api/calendars/:calendarId/entries/:entryId/signs/:ownId/seen/:seenId',
+    summary: 'Take back that a sign in an entry’s own words was seen, by whoever marked it',
+    access: member('calendar', ...ROLES),
+    params: ownParams.extend({ seenId: id }),
+    response: ownSeen,
   }),
 } as const;

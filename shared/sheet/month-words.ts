@@ -4,7 +4,7 @@ import type { SheetEntry, SheetMarker, SheetModel } from './sheet-model.js';
 import { joinLabel } from './text-layout.js';
 import type { TextMeasurer } from './text-layout.js';
 import { LEGEND_BOLD, nameBlock, plainBlock, smallBlock } from './word-block.js';
-import type { BlockArea, CardWords } from './word-block.js';
+import type { BlockArea, CardWords, WordDetail } from './word-block.js';
 
 /** The words of one month: notices that hold in it, then what comes in it in large letters, what only begins or ends in it in a small list. */
 export function monthWords(
@@ -118,13 +118,14 @@ export function entryWhen(model: SheetModel, entry: SheetEntry): { side: string[
 }
 
 /** What to know about an entry besides its days, in the order look, last day, if late, stop, take care, who checked it. */
-export function entryDetails(model: SheetModel, entry: SheetEntry): { text: string; bold: boolean }[] {
+export function entryDetails(model: SheetModel, entry: SheetEntry): WordDetail[] {
   const { words } = model;
   const said = (text: string): boolean => text.trim() !== '';
   return [
     ...(said(entry.signs)
       ? [{ text: words.lookFor({ signs: entry.signs, needed: entry.signsNeeded }), bold: false }]
       : []),
+    ...tickDetails(model, entry),
     ...(said(entry.dateSetBy) ? [{ text: words.dateSetBy(entry.dateSetBy), bold: false }] : []),
     ...(entry.lastAdvised === null ? [] : [{ text: words.lastAdvised(entry.lastAdvised), bold: true }]),
     ...(said(entry.ifLate) ? [{ text: words.ifLate(entry.ifLate), bold: false }] : []),
@@ -132,6 +133,16 @@ export function entryDetails(model: SheetModel, entry: SheetEntry): { text: stri
     ...(said(entry.caution) ? [{ text: words.takeCare(entry.caution), bold: true }] : []),
     ...(entry.checked ?? []).map((check) => ({ text: words.checkedBy(check), bold: false })),
   ];
+}
+
+/** Empty circles for the signs that are waited for, and the one without which nothing begins. */
+export function tickDetails(
+  { words }: SheetModel,
+  { signs, signsNeeded, mustHaveSign = '' }: SheetEntry,
+): WordDetail[] {
+  const count = signsNeeded ?? 0;
+  if (signs.trim() === '' || count < 1) return [];
+  return [{ text: words.tickSigns({ count, mustHave: mustHaveSign }), bold: false, circles: count }];
 }
 
 function entryBlock(

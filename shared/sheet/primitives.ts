@@ -68,7 +68,7 @@ export interface RectPrimitive extends Box {
 
 export interface DiscPrimitive {
   readonly type: 'disc';
-  readonly role: 'moon' | 'tag' | 'clearing' | 'star-path';
+  readonly role: 'moon' | 'tag' | 'clearing' | 'star-path' | 'tick';
   readonly cx: number;
   readonly cy: number;
   readonly radius: number;

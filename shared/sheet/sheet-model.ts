@@ -54,7 +54,10 @@ export interface SheetEntry {
   readonly dateSetBy: string;
   readonly lastAdvised: { readonly date: string; readonly source: string } | null;
   readonly signs: string;
+  /** So many circles stand beside them, to be ticked with a pencil. */
   readonly signsNeeded: number | null;
+  /** The sign without which nothing begins; left out where there is none. */
+  readonly mustHaveSign?: string;
   readonly ifLate: string;
   readonly caution: string;
   /** The day on which to stop, and whose word that is. */

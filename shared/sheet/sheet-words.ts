@@ -45,6 +45,8 @@ export interface SheetWords {
   lookFor(of: { signs: string; needed: number | null }): string;
   /** The signs without the words that open the sentence, for under a heading. */
   signs(of: { signs: string; needed: number | null }): string;
+  /** Beside empty circles; `mustHave` is empty where no sign is. */
+  tickSigns(of: { count: number; mustHave: string }): string;
   ifLate(rule: string): string;
   takeCare(caution: string): string;
   notice(notice: SheetNotice): string;

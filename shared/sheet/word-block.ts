@@ -4,6 +4,7 @@ import type { Label } from './sheet-model.js';
 import { STROKE_MM } from './strokes.js';
 import { capHeightMm, leadingMm, textBlock, textOnBaseline, wrapLabel, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
+import { circlesWidthMm, tickCircles } from './tick-circles.js';
 import { roundMm } from './units.js';
 
 export const EVENT_NAME: TextStyle = { role: 'event-name', sizePt: 30, weight: 700 };
@@ -48,6 +49,13 @@ export interface BlockName {
   readonly titles: Label;
 }
 
+/** Something to know about an entry; circles to be ticked stand before its words. */
+export interface WordDetail {
+  readonly text: string;
+  readonly bold: boolean;
+  readonly circles?: number;
+}
+
 function block(rows: readonly WordRow[]): WordBlock {
   return { rows, height: rows.reduce((sum, row) => sum + row.height, 0) };
 }
@@ -59,7 +67,7 @@ function block(rows: readonly WordRow[]): WordBlock {
 export function nameBlock(
   name: BlockName,
   when: { readonly side: readonly string[]; readonly sentence: string },
-  details: readonly { readonly text: string; readonly bold: boolean }[],
+  details: readonly WordDetail[],
   area: BlockArea,
   measurer: TextMeasurer,
 ): CardWords {
@@ -95,16 +103,21 @@ export function nameBlock(
         : []),
     ],
   }));
-  const said = (text: string, bold: boolean): WordRow[] => {
+  const said = ({ text, bold, circles = 0 }: WordDetail): WordRow[] => {
     const style = bold ? LEGEND_BOLD : LEGEND;
-    return wrapText(text, width, style, measurer).map((line) => ({
-      height: leadingMm(style),
-      draw: (top) => [textBlock([line], { x: left, top }, style, measurer)],
+    const height = leadingMm(style);
+    const x = left + circlesWidthMm(circles);
+    return wrapText(text, area.right - x, style, measurer).map((line, index) => ({
+      height,
+      draw: (top) => [
+        ...(index === 0 ? tickCircles(circles, { left, middle: top + height / 2 }) : []),
+        textBlock([line], { x, top }, style, measurer),
+      ],
     }));
   };
-  if (!daysAtTheSide) rows.push(...said(when.sentence, false));
+  if (!daysAtTheSide) rows.push(...said({ text: when.sentence, bold: false }));
   const end: WordRow = { height: AFTER_BLOCK_MM, draw: () => [] };
-  const more = details.flatMap(({ text, bold }) => said(text, bold));
+  const more = details.flatMap(said);
   return { short: block([...rows, end]), full: block([...rows, ...more, end]) };
 }
 

@@ -1,5 +1,5 @@
 import { barLegend } from './bar-legend.js';
-import { entryWhen } from './month-words.js';
+import { entryWhen, tickDetails } from './month-words.js';
 import { barDown, issueWords, pageFoot } from './page-foot.js';
 import type { Primitive, SheetPage } from './primitives.js';
 import type { SheetEntry, SheetMarker, SheetModel } from './sheet-model.js';
@@ -11,7 +11,8 @@ import { roundMm } from './units.js';
 import { versionFigure } from './version-figure.js';
 import { watermarked } from './watermark.js';
 import { BLOCK_ICON_MM, flowBlocks, LEGEND, LEGEND_BOLD, plainBlock, tagMark } from './word-block.js';
-import type { WordBlock, WordRow } from './word-block.js';
+import { tickCircles } from './tick-circles.js';
+import type { WordBlock, WordDetail, WordRow } from './word-block.js';
 import { TILE_PAGE_HEIGHT_MM, TILE_PAGE_WIDTH_MM } from './year-tiles.js';
 
 /** The sheet that hangs beside the board: every name in full, what to look for, what to do, what if it is late. */
@@ -27,11 +28,6 @@ const MAX_FOOT_MM = 70;
 const AFTER_BLOCK_MM = 2.6;
 /** Markers are no events: their picture is smaller than board size. */
 const MARKER_ICON_MM = 12.5;
-
-interface Line {
-  readonly text: string;
-  readonly bold: boolean;
-}
 
 export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
   const foot = pageFoot(model, AREA, model.markers.length > 0, MAX_FOOT_MM, measurer);
@@ -140,12 +136,15 @@ function entryRow(model: SheetModel, entry: SheetEntry, measurer: TextMeasurer):
   const when = touchesYear(entry, model.year)
     ? entryWhen(model, entry).sentence || words.range(...ends(entry))
     : (entry.whyNoDate ?? words.noDate(''));
-  const plain = (text: string): Line => ({ text, bold: false });
-  const strong = (text: string): Line => ({ text, bold: true });
+  const plain = (text: string): WordDetail => ({ text, bold: false });
+  const strong = (text: string): WordDetail => ({ text, bold: true });
   return tableRow(
     { kind: 'entry', tag: String(entry.number), icon: entry.icon },
     {
-      look: said(entry.signs) ? [plain(words.signs({ signs: entry.signs, needed: entry.signsNeeded }))] : [],
+      look: [
+        ...(said(entry.signs) ? [plain(words.signs({ signs: entry.signs, needed: entry.signsNeeded }))] : []),
+        ...tickDetails(model, entry),
+      ],
       do: [
         ...wrapLabel(entry.titles, DO.width, LEGEND_BOLD, measurer).map(strong),
         plain(when),
@@ -171,7 +170,11 @@ function ends(entry: SheetEntry): [string, string] {
 /** A row of the table as lines side by side, so that one longer than a page can be cut between them. */
 function tableRow(
   name: { readonly kind: 'marker' | 'entry'; readonly tag: string; readonly icon: SheetEntry['icon'] },
-  columns: { readonly look: readonly Line[]; readonly do: readonly Line[]; readonly late: readonly Line[] },
+  columns: {
+    readonly look: readonly WordDetail[];
+    readonly do: readonly WordDetail[];
+    readonly late: readonly WordDetail[];
+  },
   measurer: TextMeasurer,
 ): WordBlock {
   const wrapped = [
@@ -201,7 +204,12 @@ function tableRow(
       ...wrapped.flatMap(({ left, lines }) => {
         const line = lines[index];
         if (line === undefined) return [];
-        return [textBlock([line.text], { x: left, top }, line.bold ? LEGEND_BOLD : LEGEND, measurer)];
+        return [
+          ...tickCircles(line.circles ?? 0, { left, middle: top + lineHeight / 2 }),
+          ...(line.text === ''
+            ? []
+            : [textBlock([line.text], { x: left, top }, line.bold ? LEGEND_BOLD : LEGEND, measurer)]),
+        ];
       }),
     ],
   }));
@@ -212,10 +220,12 @@ function tableRow(
   return { rows: [...rows, end], height: count * lineHeight + AFTER_BLOCK_MM };
 }
 
-function wrapAll(lines: readonly Line[], widthMm: number, measurer: TextMeasurer): Line[] {
-  return lines.flatMap(({ text, bold }) =>
-    wrapText(text, widthMm, bold ? LEGEND_BOLD : LEGEND, measurer).map((line) => ({ text: line, bold })),
-  );
+/** Circles have a line of their own above their words: a column is narrow. */
+function wrapAll(lines: readonly WordDetail[], widthMm: number, measurer: TextMeasurer): WordDetail[] {
+  return lines.flatMap(({ text, bold, circles }) => [
+    ...(circles === undefined ? [] : [{ text: '', bold, circles }]),
+    ...wrapText(text, widthMm, bold ? LEGEND_BOLD : LEGEND, measurer).map((line) => ({ text: line, bold })),
+  ]);
 }
 
 function stack(rows: readonly WordRow[], top: number): Primitive[] {

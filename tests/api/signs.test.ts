@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Calendar, Entry } from '#shared/contracts/calendars.js';
 import type { Problem } from '#shared/contracts/problem.js';
-import type { Sign } from '#shared/contracts/signs.js';
+import type { OwnSeen, Sign } from '#shared/contracts/signs.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
@@ -16,7 +16,15 @@ import {
   type Village,
 } from '#tests/support/calendar-api.js';
 import { tablesWith } from '#tests/support/search-everything.js';
-import { addSign, signInput, signNames, signsOf, signsPath, waitingFor } from '#tests/support/sign-api.js';
+import {
+  addSign,
+  signInput,
+  signNames,
+  signsOf,
+  signsPath,
+  waitingFor,
+  waitingForOwn,
+} from '#tests/support/sign-api.js';
 import { sharingPath } from '#tests/support/sharing-api.js';
 
 let api: TestApi;
@@ -114,6 +122,74 @@ describe('seeing a sign', () => {
       answers.push(...fieldsOf((await observer.post(`${pathOf(sign)}/seen`, { ...seen, day })).body));
     }
     expect(answers).toEqual(['day: still-to-come', 'day: too-long-ago']);
+  });
+});
+
+describe('a sign in an entry’s own words', () => {
+  const seen = { day: '2026-11-29', who: 'Tirel' };
+  const own = async () => {
+    const record = waitingForOwn();
+    const entry = await addEntry(village.officer, calendar.id, {
+      ...{ record, giver: 'Elder A-1', ifLate: 'Sow beans.' },
+    });
+    const ownId = entry.content.record?.signs.list[0]?.ownId ?? '';
+    return { entry, ownId, path: `/api/calendars/${calendar.id}/entries/${entry.id}/signs/${ownId}/seen` };
+  };
+  const told = async (client: Client) => {
+    const path = `/api/communities/${client.communityId}/own-signs-seen`;
+    return ((await client.get(path).expect(200)).body as { items: OwnSeen[] }).items;
+  };
+
+  it('is marked like one of the list, by whoever sees it, and taken back by whoever marked it', async () => {
+    const { entry, ownId, path } = await own();
+    const marked = (await village.elder.post(path, seen).expect(201)).body as OwnSeen;
+    expect(marked).toMatchObject({ entryId: entry.id, ownId, seen: [{ ...seen, mine: true }] });
+    expect(await told(village.officer)).toMatchObject([{ ownId, seen: [{ ...seen, mine: false }] }]);
+    const one = `${path}/${marked.seen[0]?.id ?? ''}`;
+    expect(reasonOf(await village.officer.delete(one))).toBe('409 not-the-marker');
+    expect(((await village.elder.delete(one).expect(200)).body as OwnSeen).seen).toEqual([]);
+    expect(await told(village.officer)).toEqual([]);
+  });
+
+  it('leaves no trace of a draft for others, and is theirs to mark once it was published', async () => {
+    const { path } = await own();
+    await village.elder.post(path, seen).expect(201);
+    expect(reasonOf(await observer.post(path, seen))).toBe('404 not-found');
+    expect(await told(observer)).toEqual([]);
+    await publishDraft(village, calendar.id);
+    await observer.post(path, { ...seen, who: 'Sanwe' }).expect(201);
+    expect((await told(observer)).flatMap(({ seen: all }) => all.map(({ who }) => who)).sort()).toEqual([
+      ...['Sanwe', 'Tirel'],
+    ]);
+  });
+
+  it('keeps its sightings while its words are mended, and loses them with its entry', async () => {
+    const { entry, ownId, path } = await own();
+    await village.elder.post(path, { ...seen, who: 'Zqseen' }).expect(201);
+    const { record } = entry.content;
+    if (record === undefined) throw new Error('There is no record.');
+    const list = record.signs.list.map((sign) => ({ ...sign, name: 'Foam on the water' }));
+    await save(entry, { record: { ...record, signs: { ...record.signs, list } } }).expect(200);
+    expect((await only(village.officer)).content.record?.signs.list[0]).toMatchObject({ ownId });
+    expect(await told(village.officer)).toHaveLength(1);
+    const withdrawal = `/api/communities/${village.officer.communityId}/items/entry/${entry.id}/withdrawal`;
+    await village.officer.post(withdrawal, { leavesTrace: true, askedById: null }).expect(204);
+    expect(await tablesWith(api, 'Zqseen')).toEqual([]);
+  });
+});
+
+describe('an elder', () => {
+  it('puts a sign on the list at their own level, mends it, and leaves those of others alone', async () => {
+    const { officer, elder, elder2 } = village;
+    const kept = await addSign(elder, { name: 'Kept call', sharingLevel: 'elders' });
+    expect(await signsOf(observer)).toEqual([]);
+    expect((await signsOf(elder2)).map(({ name, mine }) => [name, mine])).toEqual([['Kept call', false]]);
+    const anew = { ...signInput({ name: 'Low call', sharingLevel: 'elders' }), version: kept.version };
+    expect(reasonOf(await elder2.put(pathOf(kept), anew))).toBe('409 not-the-giver');
+    await elder.put(pathOf(kept), anew).expect(200);
+    const offices = await addSign(officer);
+    expect(reasonOf(await elder.delete(pathOf(offices)))).toBe('409 not-the-giver');
+    expect(reasonOf(await observer.post(signsPath(observer), signInput()))).toMatch(/^403/u);
   });
 });
 

@@ -8,6 +8,7 @@ import type { RolledCalendar } from '#shared/contracts/rollovers.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { LEVELS, type Combination } from '../../docker-free-scripts/lib/visibility-rules.js';
 import {
+  hasOwnSign,
   isAskedFigure,
   isLookedAt,
   type Planted,
@@ -29,6 +30,7 @@ import {
 } from './levelled-things.js';
 import { addRecording } from './attachment-api.js';
 import { addNote } from './notes-api.js';
+import { waitingForOwn } from './sign-api.js';
 import { switchOpenPageOn } from './open-page-api.js';
 import { addGroup } from './sharing-api.js';
 
@@ -97,7 +99,12 @@ export async function furnishLevels(
     const word = plant(led === null ? 'entry' : 'led entry', seen);
     const writer = isVillages(combination) ? officer : elder;
     const input = { ...levelledEntry(word, combination, circle, entries.length), ...led };
-    const { id, content } = await addEntry(writer, calendar.id, input);
+    const awaits = hasOwnSign(combination) ? { record: waitingForOwn(word) } : {};
+    const { id, content } = await addEntry(writer, calendar.id, { ...input, ...awaits });
+    for (const { ownId } of content.record?.signs.list ?? []) {
+      const path = `/api/calendars/${calendar.id}/entries/${id}/signs/${ownId ?? ''}/seen`;
+      await elder.post(path, { day: '2026-11-29', who: word }).expect(201);
+    }
     const done = { from: '2027-06-24', to: null, saidBy: word, plots: word };
     await elder.put(`/api/calendars/${calendar.id}/entries/${id}/actual-days`, done).expect(200);
     entries.push({ ...seen, id, content });
@@ -193,6 +200,7 @@ export async function furnishLevels(
       figureId: figures.map(({ id }) => id),
       signId: signIds,
       seenId: [randomUUID()],
+      ownId: [randomUUID()],
       markerKey: askedFigures.map(({ markerKey }) => markerKey),
       itemType: [...SHARED_ITEM_TYPES],
       itemId: [...looked, ...figures].map(({ id }) => id),

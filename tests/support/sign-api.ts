@@ -44,6 +44,12 @@ export function waitingFor(signs: readonly { id: string }[], needed = signs.leng
   return wholeRecord({ signs: { list, needed, mustHave: 0 } });
 }
 
+/** A record that waits for one sign in the entry's own words. */
+export function waitingForOwn(name = 'Foam on the stream'): EventRecord {
+  const list = [{ type: 'water' as const, name, look: '', where: '', usual: null, stillSeen: null }];
+  return wholeRecord({ signs: { list, needed: 1, mustHave: 0 } });
+}
+
 export function signNames({ content }: { content: Pick<EntryInput, 'record'> } | Entry): string[] {
   return (content.record?.signs.list ?? []).map(({ name }) => name);
 }

@@ -35,6 +35,7 @@ import { EntryVariantEntity } from './entry-variant.entity.js';
 import { VersionVariantEntity } from './version-variant.entity.js';
 import { WithdrawalEntity } from './withdrawal.entity.js';
 import { SignEntity } from './sign.entity.js';
+import { OwnSightingEntity } from './own-sighting.entity.js';
 import { SignSightingEntity } from './sign-sighting.entity.js';
 import { RainDayEntity } from './rain-day.entity.js';
 import { WeatherNoticeEntity } from './weather-notice.entity.js';
@@ -55,6 +56,7 @@ export const ENTITIES = [
   FigureEntity,
   SignEntity,
   SignSightingEntity,
+  OwnSightingEntity,
   WeatherNoticeEntity,
   RainDayEntity,
   WordListEntity,

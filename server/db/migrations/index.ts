@@ -27,6 +27,7 @@ import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.j
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 import { WordLists1799300000000 } from './1799300000000-word-lists.js';
 import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
+import { OwnSightings1799300100000 } from './1799300100000-own-sightings.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -59,4 +60,5 @@ export const MIGRATIONS = [
   WriteKeys1799200000000,
   WordLists1799300000000,
   OneKindOfKeys1799600000000,
+  OwnSightings1799300100000,
 ];

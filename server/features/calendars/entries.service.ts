@@ -26,7 +26,7 @@ import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { actualDaysOf } from '../actual-days/known-days.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
-import { expectTellableSigns, withListedSigns } from '../signs/entry-signs.service.js';
+import { expectTellableSigns, withListedSigns, withOwnSignIds } from '../signs/entry-signs.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { expectKnownWords, inVillageWords, knownWords } from '../word-lists/known-words.service.js';
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
@@ -63,7 +63,8 @@ export class EntriesService {
       const writing = { entryId: null, stored: null, written: input, prefix: '' };
       const words = await knownWords(manager, actor.communityId);
       expectKnownWords(input, words, '');
-      const content = inVillageWords(await withListedSigns(manager, viewer, writing), words);
+      const listed = await withListedSigns(manager, viewer, writing);
+      const content = withOwnSignIds(inVillageWords(listed, words));
       const entries = await liveEntries(manager, calendarId);
       const id = await this.insert(manager, actor, calendarId, content, entries.length);
       await shareNewEntry(manager, actor, id, content);
@@ -88,8 +89,9 @@ export class EntriesService {
       const stored = inVillageWords(row.content, words);
       const written = withKeptGiver(viewer, shared, stored, input.content);
       const writing = { entryId, stored, written, prefix: 'content.' };
-      const content = inVillageWords(await withListedSigns(manager, viewer, writing), words);
-      const fields = changedFields(stored, content);
+      const said = inVillageWords(await withListedSigns(manager, viewer, writing), words);
+      const fields = changedFields(stored, said);
+      const content = withOwnSignIds(said);
       if (fields.includes('lead')) {
         await expectKnownMarker(manager, viewer, content, 'content.lead');
       }

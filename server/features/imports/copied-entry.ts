@@ -100,7 +100,7 @@ function recordElsewhere({ what, when, signs, work }: EventRecord): EventRecord 
   return {
     ...EMPTY_RECORD,
     ...{ what: plainWhat, when },
-    signs: { ...signs, list: signs.list.map(({ sharedId: _listed, ...words }) => words) },
+    signs: { ...signs, list: signs.list.map(({ sharedId: _listed, ownId: _own, ...words }) => words) },
     work: { ...EMPTY_RECORD.work, inputs, ifEarly, ifLaterStill },
   };
 }

@@ -16,7 +16,7 @@ import { recordAudit } from '../audit/audit.service.js';
 import { expectGoodAnchor } from '../calendars/anchored-draft.service.js';
 import { countedOnce } from '../calendars/count-once.service.js';
 import { roomAtTheEnd } from '../calendars/draft-order.service.js';
-import { withSignsOfThisVillage } from '../signs/entry-signs.service.js';
+import { withOwnSignIds, withSignsOfThisVillage } from '../signs/entry-signs.service.js';
 import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
 import { sharingOf } from '../calendars/entry-sharing.service.js';
 
@@ -86,7 +86,7 @@ async function land(
   const touched = { updatedBy: person.id, updatedAt: at };
   const viewer = await viewerOf(manager, actor, at);
   for (const [index, { id, content: said, sameAs, variants, isToBeAsked }] of entries.entries()) {
-    const content = await withSignsOfThisVillage(manager, viewer, said);
+    const content = withOwnSignIds(await withSignsOfThisVillage(manager, viewer, said));
     const position = room.first + index;
     await manager.insert(EntryEntity, { id, calendarId, position, content, deletedAt: null, ...touched });
     await share(manager, actor, calendarId, { itemType: 'entry', itemId: id, content, sameAs });

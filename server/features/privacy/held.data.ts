@@ -53,6 +53,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   rain_day: row('knowledge', ['written_by'], 'all'),
   word_list: row('knowledge', ['updated_by'], ['community_id', 'list', 'updated_at']),
   sign_sighting: row('knowledge', ['marked_by'], 'all'),
+  own_sighting: row('knowledge', ['marked_by'], 'all'),
   item_sharing: row('knowledge', ['giver_id'], 'all'),
   version_entry: row('knowledge', [], []),
   version_variant: row('knowledge', [], []),

@@ -44,13 +44,23 @@ export function toSheetEntries(
       dateSetBy: dateSetBy(content),
       lastAdvised: lastAdvisedOf({ content, dates }, year),
       signs: signsSaid(content),
-      signsNeeded: content.record?.signs.needed ?? null,
+      ...awaitedOf(content),
       ifLate: lateSaid(content),
       caution: content.caution,
       stop: stopOf(content, year),
       checked: checksOf(content),
       whyNoDate: dates.window ? null : reason({ content, dates }, year, texts, titles),
     }));
+}
+
+/** Where no number is said, all that are named are waited for. */
+function awaitedOf({ record }: EntryInput): Pick<SheetEntry, 'signsNeeded' | 'mustHaveSign'> {
+  const { list = [], needed = null, mustHave = null } = record?.signs ?? {};
+  const must = mustHave === null ? undefined : list[mustHave];
+  return {
+    signsNeeded: list.length === 0 ? null : (needed ?? list.length),
+    ...(must && { mustHaveSign: must.name }),
+  };
 }
 
 interface Line extends Body {

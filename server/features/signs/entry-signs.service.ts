@@ -1,5 +1,6 @@
 import { EMPTY_RECORD, RECORD_SIGNS_MAX, type RecordSign } from '#shared/contracts/event-record.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import { randomUUID } from 'node:crypto';
 import { In, type EntityManager } from 'typeorm';
 import { SignEntity } from '../../db/entities/sign.entity.js';
 import { invalidField } from '../../http/app-error.js';
@@ -7,6 +8,16 @@ import { maySee } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import { sharedSignIds, signSight } from '../../policy/sign-sight.js';
 import type { Viewer } from '../../policy/viewer.js';
+
+/** A content whose own signs can be told from others, and so be marked as seen, from now on. */
+export function withOwnSignIds(content: EntryInput): EntryInput {
+  const { record } = content;
+  if (record === undefined) return content;
+  const list = record.signs.list.map((sign) =>
+    sign.sharedId === undefined && sign.ownId === undefined ? { ...sign, ownId: randomUUID() } : sign,
+  );
+  return { ...content, record: { ...record, signs: { ...record.signs, list } } };
+}
 
 interface Writing {
   /** Null for a new entry. */

@@ -3,6 +3,7 @@ import { addDays } from '#shared/kernel/iso-date.js';
 import { In, IsNull, MoreThanOrEqual, type EntityManager } from 'typeorm';
 import { SignSightingEntity } from '../../db/entities/sign-sighting.entity.js';
 import { SignEntity } from '../../db/entities/sign.entity.js';
+import { invalidField } from '../../http/app-error.js';
 
 /** By name, as people sort it. */
 export async function signRows(manager: EntityManager, communityId: string): Promise<SignEntity[]> {
@@ -24,6 +25,12 @@ export async function lateSightings(
   });
   for (const row of rows) bySign.set(row.signId, [...(bySign.get(row.signId) ?? []), row]);
   return bySign;
+}
+
+/** Not a day that is still to come, nor one that is told no more. */
+export function expectDayTold(day: string, today: string): void {
+  if (day > today) throw invalidField('day', 'still-to-come');
+  if (day < firstDayTold(today)) throw invalidField('day', 'too-long-ago');
 }
 
 /** The first day of which it is still told that a sign was seen. */

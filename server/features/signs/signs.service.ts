@@ -18,7 +18,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField, notFound, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { maySee } from '../../policy/policy.js';
+import { maySee, type Shared } from '../../policy/policy.js';
 import { insertSharing, lockSharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
@@ -28,7 +28,7 @@ import { expectKnownPeople } from '../sharing/known-people.service.js';
 import { seenUses } from '../figures/seen-figures.service.js';
 import { entriesThatWaitFor, writeWordsIntoDrafts } from './sign-uses.service.js';
 import { toSign, wordsOf } from './signs.mapper.js';
-import { firstDayTold, lateSightings, signRows } from './signs.repository.js';
+import { expectDayTold, lateSightings, signRows } from './signs.repository.js';
 
 type Action =
   'sign-added' | 'sign-changed' | 'sign-taken-out' | 'sign-put-back' | 'sign-seen' | 'sign-seen-taken-back';
@@ -69,7 +69,7 @@ export class SignsService {
   /** Saving what is stored already changes nothing. */
   async update(actor: Actor, signId: string, input: SignUpdate): Promise<Sign> {
     return inTransaction(this.dataSource, async (manager) => {
-      const row = await this.find(manager, actor, signId);
+      const row = await this.changeable(manager, actor, signId);
       const current = await this.describe(manager, actor, signId);
       if (row.version !== input.version) throw stale(current, input);
       const words = wordsOf(input);
@@ -88,7 +88,7 @@ export class SignsService {
   /** Refused while an entry of a draft waits for it; those that the person sees are named. */
   async remove(actor: Actor, signId: string): Promise<void> {
     await inTransaction(this.dataSource, async (manager) => {
-      await this.find(manager, actor, signId);
+      await this.changeable(manager, actor, signId);
       const uses = (await entriesThatWaitFor(manager, signId)).filter(({ deletedAt }) => deletedAt === null);
       if (uses.length > 0) {
         const seen = await seenUses(manager, await this.viewer(manager, actor), uses);
@@ -108,7 +108,7 @@ export class SignsService {
 
   async restore(actor: Actor, signId: string): Promise<Sign> {
     return inTransaction(this.dataSource, async (manager) => {
-      const row = await this.find(manager, actor, signId, 'taken out too');
+      const row = await this.changeable(manager, actor, signId, 'taken out too');
       if (row.takenOutAt === null) throw conflict('sign-is-there');
       await this.expectRoom(manager, actor);
       await manager.update(SignEntity, { id: signId }, { takenOutAt: null, ...this.touchedBy(actor) });
@@ -122,8 +122,7 @@ export class SignsService {
     return inTransaction(this.dataSource, async (manager) => {
       await this.find(manager, actor, signId);
       const { today } = await this.viewer(manager, actor);
-      if (day > today) throw invalidField('day', 'still-to-come');
-      if (day < firstDayTold(today)) throw invalidField('day', 'too-long-ago');
+      expectDayTold(day, today);
       const late = (await lateSightings(manager, [signId], today)).get(signId) ?? [];
       if (late.length >= SIGHTINGS_MAX) throw conflict('seen-often-enough');
       const by = { markedBy: actor.person.id, markedAt: this.clock.now() };
@@ -159,6 +158,18 @@ export class SignsService {
     if (row === null || (row.takenOutAt !== null && which === 'in the list')) throw notFound();
     const shared = (await sharedById(manager, 'sign', [signId])).get(signId);
     if (!maySee(await this.viewer(manager, actor), shared)) throw notFound();
+    return row;
+  }
+
+  private async changeable(
+    manager: EntityManager,
+    actor: Actor,
+    signId: string,
+    which: 'in the list' | 'taken out too' = 'in the list',
+  ): Promise<SignEntity> {
+    const row = await this.find(manager, actor, signId, which);
+    const shared = (await sharedById(manager, 'sign', [signId])).get(signId);
+    if (!mayChange(await this.viewer(manager, actor), shared)) throw conflict('not-the-giver');
     return row;
   }
 
@@ -215,6 +226,11 @@ export class SignsService {
   }
 }
 
+/** The list is the officers' to keep; what an elder put there is theirs to mend, too. */
+function mayChange({ roles, personId }: Viewer, shared: Shared | undefined): boolean {
+  return roles.includes('officer') || (roles.includes('elder') && shared?.giverId === personId);
+}
+
 /** Signs as one person sees them. */
 async function seenSigns(
   manager: EntityManager,
@@ -241,6 +257,7 @@ async function seenSigns(
     const one = shared.get(row.id);
     if (one === undefined) return [];
     const { personId } = viewer;
-    return [toSign({ row, shared: one, sightings: sightings.get(row.id) ?? [], names, personId })];
+    const facts = { row, shared: one, sightings: sightings.get(row.id) ?? [], names, personId };
+    return [toSign({ ...facts, mine: mayChange(viewer, one) })];
   });
 }

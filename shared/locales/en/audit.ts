@@ -49,6 +49,8 @@ export const texts = {
     'sign-taken-out': '{{actor}} took the sign {{subject}} out of the list.',
     'sign-put-back': '{{actor}} put the sign {{subject}} back.',
     'sign-seen': '{{actor}} marked the sign {{subject}} as seen.',
+    'own-sign-seen': '{{actor}} marked a sign of {{subject}} as seen.',
+    'own-sign-seen-taken-back': '{{actor}} took back that a sign of {{subject}} was seen.',
     'sign-seen-taken-back': '{{actor}} took back that the sign {{subject}} was seen.',
     'attachment-added': '{{actor}} added {{what}}.',
     'attachment-words-written': '{{actor}} wrote out the words of {{what}}.',

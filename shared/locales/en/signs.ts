@@ -12,7 +12,8 @@ export const texts = {
     forEars_other: '{{count}} signs of {{total}} are in',
     areIn: 'In: {{names}}.',
     notWithout: 'Not without: {{name}}.',
-    ownWords: 'Not in the village’s list, so look for yourself: {{names}}.',
+    ownWords: 'Cannot be marked as seen, so look for yourself: {{names}}.',
+    see: 'I saw a sign of this entry',
     stop: 'Stop on {{day}} ({{source}}).',
   },
 
@@ -75,7 +76,7 @@ export const texts = {
     choose: 'Choose from the village’s list',
     chooseNone: 'choose a sign',
     toList: 'Put on the village’s list',
-    toListHint: 'Then other entries can wait for it, and people can mark it as seen.',
+    toListHint: 'Then other entries can wait for it, too.',
     onList: '{{name}} is on the village’s list.',
   },
 } as const;

@@ -117,6 +117,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             record={entry.content.record}
             window={entry.dates?.window ?? null}
             year={editor.calendar.year}
+            home={saved ? { calendarId: editor.calendar.id, entryId: saved.id } : undefined}
           />
           <GroupFolds form={form} groups={groups} onSearch={search} />
           <RecordNeeds content={entry.content} />

@@ -48,6 +48,7 @@ export function EntryReading({
           record={entry.content.record}
           window={entry.dates?.window ?? null}
           year={calendar.year}
+          home={{ calendarId: calendar.id, entryId: entry.id }}
         />
         {GROUPS.filter((group) => groups[group].length > 0).map((group) => (
           <div key={group} className="fact-group">

@@ -12,6 +12,7 @@ import { Button } from '#src/ui/button.js';
 import { Chip } from '#src/ui/chip.js';
 import { FieldNotes, SelectField } from '#src/ui/field.js';
 import { useToast } from '#src/ui/toast.js';
+import type { EntryDraft } from '../model/entry-draft.js';
 import { setRecord, type RecordProps } from './record-parts.js';
 
 /** Signs of the village's list for which this entry does not wait yet. */
@@ -63,22 +64,25 @@ export function SignFromList({ sign, problem }: { sign: RecordSign; problem: str
 }
 
 interface SignToListProps {
+  draft: EntryDraft;
   sign: RecordSign;
   onListed: (patch: Pick<RecordSign, 'sharedId'>) => void;
 }
 
 /** Makes an entry's own sign one of the village's, which people can mark as seen. */
-export function SignToList({ sign, onListed }: SignToListProps) {
+export function SignToList({ draft, sign, onListed }: SignToListProps) {
   const { t } = useTranslation('signs');
   const { communityId } = useCurrentCommunity();
-  const mayWrite = useRoles().is('officer');
+  const mayWrite = useRoles().is('officer', 'elder');
   const words = useProblemWords();
   const say = useToast();
   const add = useNewSign(communityId);
   if (!mayWrite || sign.name.trim() === '') return null;
-  const { sharedId: _own, ...said } = sign;
+  const { sharedId: _listed, ownId: _own, ...said } = sign;
+  // No more people see the sign than the entry whose words it was.
+  const { sharingLevel, sharing } = draft;
   const list = async () => {
-    const parsed = signInput.safeParse({ ...said, sharingLevel: 'village' });
+    const parsed = signInput.safeParse({ ...said, sharingLevel, sharing });
     if (!parsed.success) return;
     try {
       const { id, name } = await add.mutateAsync(parsed.data);

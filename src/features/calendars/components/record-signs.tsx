@@ -89,7 +89,7 @@ function OneSign({ form, sign, index }: OneSignProps) {
         <SignFromList sign={sign} problem={at('sharedId')} />
       )}
       <div className="flex flex-wrap items-end justify-between gap-3">
-        {sign.sharedId === undefined && <SignToList sign={sign} onListed={set} />}
+        {sign.sharedId === undefined && <SignToList draft={form.draft} sign={sign} onListed={set} />}
         <Button
           look="quiet"
           icon={<Trash2 aria-hidden size={20} />}

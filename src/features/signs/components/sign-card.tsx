@@ -2,6 +2,8 @@ import { useTranslation } from 'react-i18next';
 import type { Sign } from '#shared/contracts/signs.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { KeptChip } from '#src/lib/level-chip.js';
+import { SeeSign } from '#src/lib/see-sign.js';
+import { useSeeing } from '#src/lib/sign-queries.js';
 import { SureButton } from '#src/lib/sure-button.js';
 import { TakeBackLink } from '#src/lib/take-back-link.js';
 import { useVillageDay } from '#src/lib/village-day.js';
@@ -9,8 +11,7 @@ import { Button } from '#src/ui/button.js';
 import { Board } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useSignChanges } from '../api/sign-mutations.js';
-import { OneSighting } from './sightings.js';
-import { SeeSign } from './see-sign.js';
+import { SightingOf } from './sightings.js';
 
 /** Any year without a 29 February. */
 const PLAIN_YEAR = 2027;
@@ -21,6 +22,7 @@ export function SignCard({ sign, onChange }: { sign: Sign; onChange: (() => void
   const { t } = useTranslation(['signs', 'record']);
   const dates = useDateWords();
   const today = useVillageDay();
+  const { mark } = useSeeing(sign.communityId);
   const { name, type, look, where, usual, seen, communityId } = sign;
   const monthDay = (day: { month: number; day: number }) => dates.day({ year: PLAIN_YEAR, ...day });
   const said = [
@@ -40,14 +42,14 @@ export function SignCard({ sign, onChange }: { sign: Sign; onChange: (() => void
         <ul className="mt-2 grid gap-1">
           {seen.slice(0, SHOWN_SIGHTINGS).map((one) => (
             <li key={one.id}>
-              <OneSighting sign={sign} seen={one} />
+              <SightingOf sign={sign} seen={one} />
             </li>
           ))}
         </ul>
       )}
       <div className="mt-3 flex flex-wrap items-center gap-x-3 gap-y-2">
         <SeeSign
-          communityId={communityId}
+          mark={(signId, body) => mark.mutateAsync({ signId, body })}
           signs={[sign]}
           today={today}
           label={t('list.seen')}

@@ -5,12 +5,12 @@ import { Link } from 'react-router-dom';
 import type { Sign } from '#shared/contracts/signs.js';
 import { useCurrentCommunity } from '#src/lib/community.js';
 import { paths } from '#src/lib/paths.js';
-import { signsQuery } from '#src/lib/sign-queries.js';
+import { SeeSign } from '#src/lib/see-sign.js';
+import { signsQuery, useSeeing } from '#src/lib/sign-queries.js';
 import { useVillageDay } from '#src/lib/village-day.js';
 import { Board } from '#src/ui/surfaces.js';
 import { latelySeen } from '../model/lately-seen.js';
-import { OneSighting } from './sightings.js';
-import { SeeSign } from './see-sign.js';
+import { SightingOf } from './sightings.js';
 
 /** On Today: the signs that are in, and a way to say that another one was seen. Not there while the list is empty. */
 export function SignsBoard() {
@@ -27,6 +27,7 @@ export function SignsBoard() {
 function SignsIn({ communityId, signs }: { communityId: string; signs: readonly Sign[] }) {
   const { t } = useTranslation('signs');
   const today = useVillageDay();
+  const { mark } = useSeeing(communityId);
   const lately = latelySeen(signs, today);
   return (
     <Board title={t('board.title')}>
@@ -37,13 +38,18 @@ function SignsIn({ communityId, signs }: { communityId: string; signs: readonly 
         <ul className="grid gap-1">
           {lately.map(({ sign, seen }) => (
             <li key={sign.id}>
-              <OneSighting sign={sign} seen={seen} />
+              <SightingOf sign={sign} seen={seen} />
             </li>
           ))}
         </ul>
       )}
       <div className="mt-3 flex flex-wrap items-center gap-3">
-        <SeeSign communityId={communityId} signs={signs} today={today} label={t('board.see')} />
+        <SeeSign
+          mark={(signId, body) => mark.mutateAsync({ signId, body })}
+          signs={signs}
+          today={today}
+          label={t('board.see')}
+        />
         <Link to={paths.villageSigns()}>{t('board.all')}</Link>
       </div>
     </Board>

@@ -11,11 +11,11 @@ import { Dialog } from '#src/ui/dialog.js';
 import { SignCard } from './sign-card.js';
 import { SignForm } from './sign-form.js';
 
-/** The village's signs; officers add and change them, everybody says when one was seen. */
+/** The village's signs; officers and elders add them, everybody says when one was seen. */
 export function SignsList() {
   const { t } = useTranslation('signs');
   const { communityId } = useCurrentCommunity();
-  const mayWrite = useRoles().is('officer');
+  const mayAdd = useRoles().is('officer', 'elder');
   const query = useQuery(signsQuery(communityId));
   const [written, setWritten] = useState<Sign | 'new' | null>(null);
   const close = () => {
@@ -26,7 +26,7 @@ export function SignsList() {
       <VillageList
         query={query}
         add={
-          mayWrite ? (
+          mayAdd ? (
             <Button
               icon={<Plus aria-hidden size={20} />}
               onClick={() => {
@@ -39,7 +39,7 @@ export function SignsList() {
         }
         none={{ title: t('list.none'), hint: t('list.noneHint') }}
         lead={t('list.lead')}
-        card={(sign) => <SignCard sign={sign} onChange={mayWrite ? () => setWritten(sign) : null} />}
+        card={(sign) => <SignCard sign={sign} onChange={sign.mine ? () => setWritten(sign) : null} />}
       />
       <Dialog
         title={t(written === 'new' ? 'form.new' : 'form.change')}

@@ -65,7 +65,12 @@ export function PegBoard({ today }: { today: Today }) {
               {open.otherSigns !== '' && (
                 <span className="block text-umber-soft text-small">{open.otherSigns}</span>
               )}
-              <SignsInLine record={open.awaits} window={open.window} year={open.year} />
+              <SignsInLine
+                record={open.awaits}
+                window={open.window}
+                year={open.year}
+                home={{ calendarId: open.calendarId, entryId: open.entryId }}
+              />
             </div>
           </li>
         ))}

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { wasPublished } from '#shared/calendar/version-state.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import type { DoneSince, Version, VersionEntry, VersionHeader } from '#shared/contracts/versions.js';
 import { dayNumberOf } from '#shared/kernel/iso-date.js';
@@ -39,6 +40,8 @@ export function FrozenEntries({ version, about }: FrozenEntriesProps) {
             <FrozenEntry
               entry={entry}
               header={header}
+              // Signs are marked as seen where people may go by the entry.
+              calendarId={wasPublished(version.state) ? version.calendarId : null}
               markers={markers}
               done={version.doneSince?.find(({ entryId }) => entryId === entry.entryId)}
               about={about}
@@ -55,13 +58,14 @@ export function FrozenEntries({ version, about }: FrozenEntriesProps) {
 interface FrozenEntryProps {
   entry: VersionEntry;
   header: VersionHeader;
+  calendarId: string | null;
   markers: NamesByKey;
   /** What was done since, where it is counted from that. */
   done: DoneSince | undefined;
   about: FrozenEntriesProps['about'];
 }
 
-function FrozenEntry({ entry, header, markers, done, about }: FrozenEntryProps) {
+function FrozenEntry({ entry, header, calendarId, markers, done, about }: FrozenEntryProps) {
   const words = useEntryWords();
   const dateWords = useDateWords();
   const { content, dates } = entry;
@@ -100,7 +104,12 @@ function FrozenEntry({ entry, header, markers, done, about }: FrozenEntryProps) 
               .map(({ dayNumber }) => dayNumber)}
           />
         )}
-        <SignsInLine record={content.record} window={board ?? null} year={year} />
+        <SignsInLine
+          record={content.record}
+          window={board ?? null}
+          year={year}
+          home={calendarId === null ? undefined : { calendarId, entryId: entry.entryId }}
+        />
         <BesideIt entry={entry} year={year} markers={markers} />
         <EntryRest entry={entry} year={year} markers={markers} />
         {about?.(entry)}

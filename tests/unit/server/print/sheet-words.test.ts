@@ -39,6 +39,13 @@ describe('the words of a sheet', () => {
     expect(said.lookFor({ signs: 'birds', needed: 1 })).toContain('1 of these is in');
   });
 
+  it('say what the circles beside signs are for, and without which sign nothing begins', () => {
+    expect(said.tickSigns({ count: 2, mustHave: '' })).toBe('Tick one for each sign that is in.');
+    expect(said.tickSigns({ count: 1, mustHave: 'wet soil' })).toBe(
+      'Tick it when the sign is in. Not without: wet soil.',
+    );
+  });
+
   it('say "last advised", never "safe", with the office that says so', () => {
     expect(said.lastAdvised({ date: '2027-07-05', source: 'agricultural office' })).toBe(
       'Last advised: 5\u00a0July (agricultural office).',

@@ -47,6 +47,13 @@ describe('how many signs are in', () => {
     });
   });
 
+  it('counts one in the entry’s own words once it was saved, whether it was seen yet or not', () => {
+    const saved = { list: [{ ownId: 'foam' }, own], needed: 1, mustHave: null };
+    expect(signsIn(saved, new Map(), span)).toMatchObject({ isIn: [false, null], state: 'prepare' });
+    const days = new Map([['foam', [day('2027-06-12')]]]);
+    expect(signsIn(saved, days, span)).toMatchObject({ isIn: [true, null], state: 'signs-are-in' });
+  });
+
   it('is never enough without the must-have sign', () => {
     const without = { ...signs, needed: 1 };
     expect(signsIn(without, seen('frogs'), span)).toMatchObject({ missingMust: 0, state: 'prepare' });

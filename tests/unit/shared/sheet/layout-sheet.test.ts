@@ -49,6 +49,20 @@ describe.each(LAYOUTS)('a sheet as %s', (kind) => {
     );
   });
 
+  it('has an empty circle to tick for each sign that is needed, and none where no sign is named', () => {
+    const waits = { signs: 'wet soil, reed caller, foam', signsNeeded: 2, mustHaveSign: 'wet soil' };
+    const window = { ...entry({}).window, bestFrom: '2027-06-04', bestTo: '2027-06-12' };
+    const pages = (change: Partial<SheetEntry>) =>
+      layout({ layout: kind, entries: [entry({ window, ...change })] });
+    const ticks = (change: Partial<SheetEntry>) =>
+      pages(change).flatMap(({ primitives }) =>
+        primitives.filter((one) => one.type === 'disc' && one.role === 'tick' && one.fill === 'open'),
+      );
+    expect(ticks(waits)).toHaveLength(2);
+    expect(allWords(pages(waits)).replaceAll('\n', ' ')).toContain('Not without: wet soil.');
+    expect(ticks({ signs: 'as people see', signsNeeded: null })).toEqual([]);
+  });
+
   it('prints the next leap years beside a leap day, and never without one', () => {
     const leap = layoutSheet(
       upperTazimel({ layout: kind, year: 2028, words: words(2028), label: '2028-1' }),

@@ -1,6 +1,6 @@
 import { lazy, Suspense, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
-import { Button } from '#src/ui/button.js';
+import { Button, type ButtonLook } from '#src/ui/button.js';
 import { Dialog } from '#src/ui/dialog.js';
 import { Skeleton } from '#src/ui/waiting.js';
 import type { SeeFieldsProps } from './see-fields.js';
@@ -10,11 +10,12 @@ const SeeFields = lazy(() => import('./see-fields.js'));
 
 interface SeeSignProps extends Omit<SeeFieldsProps, 'onDone'> {
   label: ReactNode;
+  look?: ButtonLook | undefined;
   about?: string | undefined;
 }
 
 /** A button by which anybody says that a sign was seen. */
-export function SeeSign({ label, about, ...asked }: SeeSignProps) {
+export function SeeSign({ label, look, about, ...asked }: SeeSignProps) {
   const { t } = useTranslation('signs');
   const [isOpen, setIsOpen] = useState(false);
   const close = () => {
@@ -23,6 +24,7 @@ export function SeeSign({ label, about, ...asked }: SeeSignProps) {
   return (
     <>
       <Button
+        look={look}
         aria-label={about}
         onClick={() => {
           setIsOpen(true);

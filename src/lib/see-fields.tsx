@@ -2,34 +2,33 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import { z } from 'zod';
-import { sightingInput, type Sign } from '#shared/contracts/signs.js';
+import { sightingInput, type SightingInput } from '#shared/contracts/signs.js';
 import { Button } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
-import { useFormProblems } from '#src/lib/form-problems.js';
-import { useSession } from '#src/lib/session.js';
-import { useSeeing } from '#src/lib/sign-queries.js';
+import { useFormProblems } from './form-problems.js';
+import { useSession } from './session.js';
 
 const FIELDS = ['signId', 'day', 'who'] as const;
 const seeForm = sightingInput.extend({ signId: z.uuid('choose-one') });
 type SeeForm = z.infer<typeof seeForm>;
 
 export interface SeeFieldsProps {
-  communityId: string;
+  /** Says it to the server. */
+  mark: (signId: string, body: SightingInput) => Promise<unknown>;
   /** One is asked about no more; of several the person chooses. */
-  signs: readonly Sign[];
+  signs: readonly { id: string; name: string; look: string }[];
   /** The civil day at the village. */
   today: string;
   onDone: () => void;
 }
 
 /** Which sign, on which day, and by whom. */
-export default function SeeFields({ communityId, signs, today, onDone }: SeeFieldsProps) {
+export default function SeeFields({ mark, signs, today, onDone }: SeeFieldsProps) {
   const { t } = useTranslation('signs');
   const say = useToast();
   const { person } = useSession();
-  const { mark } = useSeeing(communityId);
   const [first] = signs;
   const form = useForm({
     resolver: zodResolver(seeForm),
@@ -42,8 +41,8 @@ export default function SeeFields({ communityId, signs, today, onDone }: SeeFiel
   const problems = useFormProblems(form, FIELDS);
   const submit = async ({ signId, day, who }: SeeForm) => {
     try {
-      const { name } = await mark.mutateAsync({ signId, body: { day, who } });
-      say(t('see.saved', { name }));
+      await mark(signId, { day, who });
+      say(t('see.saved', { name: signs.find(({ id }) => id === signId)?.name ?? '' }));
       onDone();
     } catch (cause) {
       problems.show(cause);
@@ -83,7 +82,7 @@ export default function SeeFields({ communityId, signs, today, onDone }: SeeFiel
         hint={t('see.whoHint')}
         problem={problems.at('who')}
       />
-      <Button type="submit" look="main" full busy={mark.isPending}>
+      <Button type="submit" look="main" full busy={form.formState.isSubmitting}>
         {t('see.save')}
       </Button>
     </form>
