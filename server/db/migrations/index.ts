@@ -59,6 +59,6 @@ export const MIGRATIONS = [
   RestoredEntries1799110000000,
   WriteKeys1799200000000,
   WordLists1799300000000,
-  OneKindOfKeys1799600000000,
   OwnSightings1799300100000,
+  OneKindOfKeys1799600000000,
 ];
