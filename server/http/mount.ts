@@ -12,7 +12,7 @@ import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-rep
 import { PreparedReply } from './reply.js';
 import { sameSession } from './same-session.js';
 import { withUpload, type UploadedFile } from './upload.js';
-import { sha256OfFile } from './file-hash.js';
+import { sha256OfFile } from '../storage/file-hash.js';
 import { writeKeyOf } from './write-key.js';
 
 type Parsed<S> = S extends z.ZodType ? z.output<S> : undefined;

@@ -3,7 +3,7 @@ import { createReadStream } from 'node:fs';
 import { Readable } from 'node:stream';
 import { PICTURE_MAX_BYTES } from '#shared/contracts/attachments.js';
 import { AppError, conflict, invalidField } from '../../http/app-error.js';
-import { sha256OfFile } from '../../http/file-hash.js';
+import { sha256OfFile } from '../../storage/file-hash.js';
 import { drawAnew } from '../../media/picture-file.js';
 import { soundTypeOf } from '../../media/sound-file.js';
 import type { FileScan } from '../../storage/file-scan.js';

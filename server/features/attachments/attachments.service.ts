@@ -14,7 +14,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { sha256OfFile } from '../../http/file-hash.js';
+import { sha256OfFile } from '../../storage/file-hash.js';
 import { personNames } from '../people/person-names.service.js';
 import { insertSharing, sharedById } from '../../policy/sharing.repository.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
