@@ -147,14 +147,21 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   previewSheet: BOARD,
   // Who says yes here says it to every use, so files to take along hold what the board holds.
   exportCalendarIcs: BOARD,
-  exportCalendarCsv: BOARD,
   // Whole: other timings stand beside their entries, as far as the board may go by them.
+  exportCalendarCsv: { ...BOARD, variant: both(sees, onBoard) },
   exportCalendarJson: { ...BOARD, variant: both(sees, onBoard) },
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.
   readOpenPage: {
     entry: (_person, thing) => thing.level === 'open' && thing.consent === 'yes' && isOnBoard(thing),
+  },
+  // What is open and does not stand there, for those who keep the page.
+  listLeftOutOfOpenPage: {
+    entry: both(
+      (person) => person === 'officer' || person === 'steward',
+      (person, thing) => thing.level === 'open' && thing.consent !== 'yes' && sees(person, thing),
+    ),
   },
   printReadBack: { entry: both(keptSeen, onBoard), 'later entry': both(keptSeen, onBoard) },
   listAttachments: TITLED_FILES,

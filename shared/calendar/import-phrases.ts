@@ -1,3 +1,5 @@
+import { escapePattern } from '#shared/kernel/escape-pattern.js';
+
 /** A way to say something with holes for what differs, `{{star}} due south at {{hour}}`, held against a cell as a whole. */
 export interface ImportPhrase {
   /** What it says, as in the product's own texts: `due-meridian`, `south`. */
@@ -87,7 +89,7 @@ function holeOf(name: string): string {
 
 /** A comma more or less between words is no other phrase; alone it parts what stands before it from what follows. */
 function wordsOf(text: string): string {
-  const escaped = text.replace(/[\\^$.*+?()[\]{}|/-]/gu, String.raw`\$&`).replace(/°/gu, ' ?°');
+  const escaped = escapePattern(text).replace(/°/gu, ' ?°');
   return /\p{L}/u.test(text) ? escaped.replace(/,/gu, ',?') : escaped;
 }
 

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { entryIcon, entryKind, entryWindow } from './calendars.js';
-import { id, instant } from './common.js';
+import { id, instant, listOf } from './common.js';
 import { defineEndpoint, member, anybody } from './endpoint.js';
 import { markerKey, markerNames, phenomenon } from './stars.js';
 
@@ -50,6 +50,36 @@ export const openPage = z.strictObject({
 });
 export type OpenPage = z.infer<typeof openPage>;
 
+/** Words of an open entry that are searched for names. */
+export const OPEN_WORDS = [
+  'titleVillage',
+  'titleOfficer',
+  'crop',
+  'otherSigns',
+  'ifLate',
+  'caution',
+] as const satisfies readonly (keyof z.infer<typeof openEntry>)[];
+export type OpenWord = (typeof OPEN_WORDS)[number];
+
+/** Why something open does not stand on the page. */
+export const LEFT_OUT_REASONS = [
+  'nobody-asked',
+  'not-agreed',
+  'by-own-figure',
+  'name-in-title',
+  'name-in-words',
+] as const;
+
+/** What the page leaves out of what is open in the newest published version, for whoever keeps the page. */
+export const leftOutOfOpenPage = z.strictObject({
+  entryId: id,
+  title: z.string(),
+  reason: z.enum(LEFT_OUT_REASONS),
+  /** Where names were found, and whose; these words stay out, of a title the whole entry. */
+  found: z.array(z.strictObject({ word: z.enum(OPEN_WORDS), names: z.array(z.string()) })),
+});
+export type LeftOutOfOpenPage = z.infer<typeof leftOutOfOpenPage>;
+
 const params = z.strictObject({ communityId: id });
 const keepers = member('community', 'officer', 'steward');
 
@@ -62,6 +92,16 @@ export const openPageEndpoints = {
     access: keepers,
     params,
     response: openPageState,
+  }),
+  leftOut: defineEndpoint({
+    id: 'listLeftOutOfOpenPage',
+    method: 'GET',
+    path: '/api/communities/:communityId/open-page/left-out',
+    summary:
+      'What is open and yet not on the page for everybody: nobody was asked, or a name was found in its words',
+    access: keepers,
+    params,
+    response: listOf(leftOutOfOpenPage),
   }),
   code: defineEndpoint({
     id: 'drawOpenPageCode',

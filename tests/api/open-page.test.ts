@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { CONSENT_USES } from '#shared/contracts/consents.js';
-import type { OpenPage, OpenPageState } from '#shared/contracts/open-page.js';
+import type { LeftOutOfOpenPage, OpenPage, OpenPageState } from '#shared/contracts/open-page.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -50,6 +50,14 @@ beforeAll(async () => {
     sharingLevel: 'open',
   });
   await addConsent(officer, 'entry', printed.id, { uses: ['keep', 'show', 'print'] });
+  const named = await addEntry(officer, calendarId, {
+    ...{ titleOfficer: 'Words with a name', sharingLevel: 'open', caution: 'Mind the dog' },
+    otherSigns: `When ${village.officer.session.person?.displayName ?? ''} says so`,
+  });
+  const titled = await addEntry(officer, calendarId, {
+    ...{ titleOfficer: `The field of ${NAME.toLowerCase()}`, sharingLevel: 'open' },
+  });
+  for (const { id } of [named, titled]) await addConsent(officer, 'entry', id, { uses: [...CONSENT_USES] });
   await publishDraft(village, calendarId);
   await addEntry(officer, calendarId, { titleOfficer: 'Later in the draft', sharingLevel: 'open' });
 }, 60_000);
@@ -76,7 +84,8 @@ describe('the page for everybody', () => {
   it('holds what is open of the newest published version, and no person', async () => {
     const answer = await read(await switchOpenPageOn(village.officer)).expect(200);
     const { entries, version } = answer.body as OpenPage;
-    expect(entries.map(({ titleOfficer }) => titleOfficer)).toEqual(['Open to all']);
+    expect(entries.map(({ titleOfficer }) => titleOfficer)).toEqual(['Open to all', 'Words with a name']);
+    expect(entries[1]).toMatchObject({ otherSigns: '', caution: 'Mind the dog' });
     expect(version).toMatchObject({ year: 2034, label: '2034-1' });
     expect(entries[0]?.window?.lastAdvised).toBe('2034-07-03');
     expect(answer.text).not.toMatch(new RegExp(`${NAME}|giver|bowl`, 'u'));
@@ -107,9 +116,25 @@ describe('the page for everybody', () => {
     const key = await switchOpenPageOn(village.officer);
     const item = `/api/communities/${village.elder.communityId}/items/entry/${openId}`;
     await village.elder.post(`${item}/pause`, { askedById: null }).expect(204);
-    expect((await page(key)).entries).toEqual([]);
+    expect((await page(key)).entries.map(({ entryId }) => entryId)).not.toContain(openId);
     await village.elder.delete(`${item}/pause`).expect(204);
-    expect((await page(key)).entries).toHaveLength(1);
+    expect((await page(key)).entries.map(({ entryId }) => entryId)).toContain(openId);
+  });
+
+  it('tells its keepers what is open and stays out, and nobody else', async () => {
+    const list = async (client: Client) =>
+      ((await client.get(`${path}/left-out`).expect(200)).body as { items: LeftOutOfOpenPage[] }).items;
+    const name = village.officer.session.person?.displayName ?? '';
+    const seen = (await list(village.steward)).map(({ title, reason, found }) => [title, reason, found]);
+    expect(seen).toEqual([
+      ['Nobody was asked', 'nobody-asked', []],
+      ['By the village’s figure', 'nobody-asked', []],
+      ['Only to be printed', 'not-agreed', []],
+      ['Words with a name', 'name-in-words', [{ word: 'otherSigns', names: [name] }]],
+      [`The field of ${NAME.toLowerCase()}`, 'name-in-title', [{ word: 'titleOfficer', names: [NAME] }]],
+    ]);
+    expect(await list(village.officer)).toHaveLength(seen.length);
+    expect(reasonOf(await village.elder.get(`${path}/left-out`))).toBe('403 not-allowed');
   });
 
   it('is drawn as a code, and slow to guess', async () => {

@@ -104,6 +104,9 @@ test('the officer opens a page for everybody, a passer-by reads it, and it is cl
   await expectAccessible(page);
   await expectNoSidewaysScroll(page);
 
+  await expect(board.getByText('Nobody was asked about these:')).toBeVisible();
+  await expect(board.getByRole('link', { name: 'Ask about “Sow long millet”' })).toBeVisible();
+
   const passing = await browser.newContext({ viewport: { width: 320, height: 740 } });
   const passerBy = await passing.newPage();
   const opened = await passerBy.goto(new URL(address).pathname + new URL(address).search);

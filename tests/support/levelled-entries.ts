@@ -38,7 +38,8 @@ export function levelledEntry(
 ): Partial<EntryInput> {
   return {
     ...{ titleOfficer: `Do ${word}`, titleVillage: word, notes: word, caution: word, otherSigns: word },
-    ...{ ifLate: word, giver: word, giverId: circle.giver.personId },
+    // One word with what follows, so that a search finds it and a page for everybody takes the rest for no one's name.
+    ...{ ifLate: word, giver: `${word}giver`, giverId: circle.giver.personId },
     ...openToday(index),
     sharingLevel: combination.level,
     sharing: sharingOf(combination, circle),

@@ -3,6 +3,7 @@ import type { Router } from 'express';
 import { FileReply } from '../../http/file-reply.js';
 import { feedLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
+import { wholeList } from '../../http/reply.js';
 import type { OpenPageService } from './open-page.service.js';
 
 export function openPageRoutes(router: Router, mount: Mount, pages: OpenPageService): void {
@@ -12,6 +13,7 @@ export function openPageRoutes(router: Router, mount: Mount, pages: OpenPageServ
   });
 
   mount.forMember(openPageEndpoints.state, (_call, actor) => pages.state(actor));
+  mount.forMember(openPageEndpoints.leftOut, async (_call, actor) => wholeList(await pages.leftOut(actor)));
   mount.forMember(openPageEndpoints.switchOn, ({ body }, actor) => pages.switchOn(actor, body.placeShown));
   mount.forMember(openPageEndpoints.switchOff, async (_call, actor) => {
     await pages.switchOff(actor);

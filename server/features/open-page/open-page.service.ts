@@ -1,5 +1,6 @@
 import {
   OPEN_PAGE_PATH,
+  type LeftOutOfOpenPage,
   type OpenPage,
   type OpenPageState,
   type PlaceShown,
@@ -13,9 +14,20 @@ import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { consentsById } from '../../policy/consent.repository.js';
+import { figureIdOf } from '../../policy/entry-sight.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
-import { toOpenEntry, toOpenPageState, toOpenPlace } from './open-page.mapper.js';
+import { knownNames } from './known-names.service.js';
+import {
+  foundNames,
+  isTitle,
+  toOpenEntry,
+  toOpenPageState,
+  toOpenPlace,
+  withoutNames,
+} from './open-page.mapper.js';
 
 const KEY_BYTES = 24;
 /** White around the code, in its own modules: readers need four. */
@@ -81,15 +93,13 @@ export class OpenPageService {
     });
     if (row === null) throw notFound();
     const { communityId, community, placeShown } = row;
-    const newest = await manager.findOne(CalendarVersionEntity, {
-      where: { state: 'published', calendar: { communityId } },
-      order: { publishedAt: 'DESC', id: 'ASC' },
-    });
+    const newest = await newestPublished(manager, communityId);
     const about = { communityName: community.name };
     if (newest === null) {
       return { ...about, placeName: null, place: null, version: null, markers: [], entries: [] };
     }
-    const { header, entries } = await this.contents.readForEverybody(communityId, newest);
+    const { header, entries, givers } = await this.contents.readForEverybody(communityId, newest);
+    const known = await knownNames(manager, communityId, givers);
     return {
       ...about,
       ...toOpenPlace(placeShown, header.place),
@@ -99,8 +109,40 @@ export class OpenPageService {
         publishedAt: (newest.publishedAt ?? newest.submittedAt).toISOString(),
       },
       markers: header.markers.map(({ strip: _nights, ...names }) => names),
-      entries: entries.map(toOpenEntry),
+      entries: entries.flatMap((entry) => withoutNames(toOpenEntry(entry), known) ?? []),
     };
+  }
+
+  /** What is open and does not stand there, or not with all its words: so that nothing stays out in silence. */
+  async leftOut({ communityId }: Actor): Promise<LeftOutOfOpenPage[]> {
+    const { manager } = this.dataSource;
+    const newest = await newestPublished(manager, communityId);
+    if (newest === null) return [];
+    const { open, entries, givers } = await this.contents.readForEverybody(communityId, newest);
+    const known = await knownNames(manager, communityId, givers);
+    const agreed = new Set(entries.map(({ entryId }) => entryId));
+    const consentsOf = await consentsById(
+      manager,
+      'entry',
+      open.map(({ entryId }) => entryId),
+    );
+    return open.flatMap((entry): LeftOutOfOpenPage[] => {
+      const { entryId, content } = entry;
+      const about = { entryId, title: content.titleOfficer };
+      if (!agreed.has(entryId)) {
+        const reason =
+          consentsOf(entryId).length === 0
+            ? 'nobody-asked'
+            : figureIdOf(markerKeyOfLead(content.lead)) === null
+              ? 'not-agreed'
+              : 'by-own-figure';
+        return [{ ...about, reason, found: [] }];
+      }
+      const found = foundNames(toOpenEntry(entry), known);
+      if (found.length === 0) return [];
+      const isWhole = found.some(({ word }) => isTitle(word));
+      return [{ ...about, reason: isWhole ? 'name-in-title' : 'name-in-words', found }];
+    });
   }
 
   private record(
@@ -112,4 +154,14 @@ export class OpenPageService {
       ...{ at, ...facts, subjectType: 'community', subjectId: facts.communityId },
     });
   }
+}
+
+async function newestPublished(
+  manager: EntityManager,
+  communityId: string,
+): Promise<CalendarVersionEntity | null> {
+  return manager.findOne(CalendarVersionEntity, {
+    where: { state: 'published', calendar: { communityId } },
+    order: { publishedAt: 'DESC', id: 'ASC' },
+  });
 }

@@ -100,8 +100,14 @@ export class FrozenContentService {
     return { ...content, header: cutHeader(content.header, entries).header, entries };
   }
 
-  /** What is open to whoever comes by, and may be handed on: nobody of the village has to ask for it. */
-  async readForEverybody(communityId: string, version: CalendarVersionEntity): Promise<CalendarContent> {
+  /**
+   * What is open to whoever comes by, and may be handed on: nobody of the village has to ask for it. Beside it all that is
+   * open by itself, for those who keep the page, and how the givers of the whole version are called, so that no word tells of them.
+   */
+  async readForEverybody(
+    communityId: string,
+    version: CalendarVersionEntity,
+  ): Promise<CalendarContent & { open: VersionEntryBody[]; givers: string[] }> {
     const { manager } = this.dataSource;
     const today = await villageDay(manager, communityId, this.clock.now());
     const passerBy = { personId: '', communityId, roles: [], groupIds: new Set<string>(), today };
@@ -112,7 +118,13 @@ export class FrozenContentService {
     const open = shown.filter((entry) => sight.isOpen(thingOf(entry)));
     const entries = await entriesForUse(manager, today, 'feed', open, true);
     const { number, label, state, hash } = version;
-    return { header: cutHeader(seen.header, entries).header, entries, number, label, state, hash };
+    const { header } = cutHeader(seen.header, entries);
+    const givers = frozen.entries.flatMap(({ content, variants = [] }) => [
+      content.giver,
+      ...variants.map(({ content: { giver } }) => giver),
+    ]);
+    const ownOpen = shown.filter(({ entryId }) => sight.sharedOf(entryId)?.level === 'open');
+    return { header, entries, number, label, state, hash, open: ownOpen, givers };
   }
 
   private async draft(manager: EntityManager, actor: Actor, calendarId: string): Promise<CalendarContent> {

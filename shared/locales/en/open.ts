@@ -32,7 +32,7 @@ export const texts = {
   foot: 'A page that the village opened itself, with what it shares with everybody. It is not for search engines.',
   board: {
     title: 'A page for everybody',
-    what: 'What is open of the newest published calendar, and was agreed to for calendars on telephones, without any person’s name, for whoever has the address. Nobody asked is a no. It is off until you switch it on.',
+    what: 'What is open of the newest published calendar, and was agreed to for calendars on telephones, for whoever has the address. Nobody asked is a no. People’s names are looked for in its words, and words with one stay out. It is off until you switch it on.',
     isOff: 'It is off.',
     isOn: 'It is on.',
     placeShown: 'How much of the place it tells',
@@ -54,5 +54,27 @@ export const texts = {
     offWhat:
       'Its address opens nothing any more, also where it hangs on walls. Switched on again, it has another one.',
     offDo: 'Switch it off now',
+    leftOut: {
+      title: 'What is open and stays out',
+      none: 'Nothing: all that is open in the newest published calendar stands on the page.',
+      what: 'As it is today, also while the page is off.',
+      'nobody-asked': 'Nobody was asked about these:',
+      'not-agreed': 'For calendars on telephones these have no yes, or it has ended:',
+      'by-own-figure':
+        'The village’s own figure that these go by is not open, or one of the two has no yes for calendars on telephones:',
+      'name-in-title': 'A name of somebody stands in the title of these, so all of each stays out:',
+      'name-in-words': 'Only these words stay out, because a name of somebody stands in them:',
+      ask: 'Ask about “{{title}}”',
+      found: '{{word}}: {{names}}',
+      rewrite: 'Write it without the name in the draft; the page follows with the next version.',
+      word: {
+        titleVillage: 'Name in the village',
+        titleOfficer: 'Name for the office',
+        crop: 'Crop or variety',
+        otherSigns: 'Other signs',
+        ifLate: 'If late',
+        caution: 'Take care',
+      },
+    },
   },
 } as const;

@@ -17,6 +17,15 @@ export function openPageStateQuery(communityId: string) {
   });
 }
 
+/** What is open and does not stand there, with the reasons. */
+export function leftOutQuery(communityId: string) {
+  return queryOptions({
+    queryKey: ['open-page-left-out', communityId],
+    queryFn: async ({ signal }) =>
+      (await callApi(openPageEndpoints.leftOut, { params: { communityId }, signal })).items,
+  });
+}
+
 export function useSwitchOn(communityId: string) {
   return useMutation({
     mutationFn: (placeShown: PlaceShown) =>

@@ -20,6 +20,7 @@ import {
   useSwitchOff,
   useSwitchOn,
 } from '../api/open-page-api.js';
+import { LeftOut } from './left-out.js';
 
 /** For officer and steward: the page for everybody, switched on and off; its address and picture. */
 export function OpenPageBoard({ communityId }: { communityId: string }) {
@@ -87,6 +88,7 @@ function Known({ communityId, state }: { communityId: string; state: OpenPageSta
       )}
       {on.error !== null && <TroubleNote sentence={words.problem(on.error)} />}
       {state.key !== null && <Address communityId={communityId} pageKey={state.key} />}
+      <LeftOut communityId={communityId} />
     </div>
   );
 }
@@ -98,7 +100,7 @@ function Address({ communityId, pageKey }: { communityId: string; pageKey: strin
   const picture = openPageCodeUrl(communityId, pageKey);
   return (
     <>
-      <p className="break-all" translate="no">
+      <p className="break-all" translate="no" dir="ltr">
         <code>{address}</code>
       </p>
       <img className="max-w-48" src={picture} alt={t('board.code')} />

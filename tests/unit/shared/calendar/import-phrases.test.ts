@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { phrasesOf, saidBy } from '#shared/calendar/import-phrases.js';
 
 const PHRASES = phrasesOf({
-  'due-meridian': { south: '{{star}} due south at {{hour}} | {{star}} sudo {{hour}}' },
+  'due-meridian': { south: '{{star}} due south at {{hour}} | {{star}} sudo-ab [{{hour}}]' },
   entry: { bestFrom: 'planned {{entry}} | planned date of {{entry}}' },
   altitude: {
     count_one: '{{star}} {{altitude}}° up, {{count}} minute',
@@ -22,7 +22,7 @@ describe('a phrase with holes', () => {
   });
 
   it('is another way to say the same, and the same in singular and plural', () => {
-    expect(read('Belt sudo 21')).toEqual({
+    expect(read('Belt sudo-ab [21]')).toEqual({
       path: ['due-meridian', 'south'],
       holes: { star: 'Belt', hour: '21' },
     });
