@@ -8,6 +8,18 @@ import { rainClashOf } from './rain-clash.js';
  * of it is frozen: it rests on other entries, on the place and on what is known today.
  */
 
+/** Everything that is told beside an entry's own warnings, in the order in which it is told. */
+export const ENTRY_ADVICE = [
+  'same-people',
+  'crop-not-ripe',
+  'crop-long-ripe',
+  'cloudy-season',
+  'moonlit',
+  'drifted',
+  'no-safety-line',
+] as const;
+export type EntryAdvice = (typeof ENTRY_ADVICE)[number];
+
 /** An entry as far as it is looked at here. */
 export interface AdvisedEntry {
   id: string;
@@ -88,6 +100,49 @@ function lengthOf({ content }: AdvisedEntry): { fromDays: number; toDays: number
   const { fromDays = null, toDays = null } = content.record?.what.variety ?? {};
   if (fromDays === null && toDays === null) return null;
   return { fromDays: fromDays ?? 0, toDays: toDays ?? Infinity };
+}
+
+/** An entry with the range in which its leading marker is expected. */
+export interface AdvisedInDraft extends AdvisedEntry {
+  markerRange: { from: number; to: number } | null;
+}
+
+/**
+ * What is told of each entry of a draft from the draft and the place alone, by id: whatever rests on the sky is told apart.
+ * Entries are looked at beside those of the same people and of the same crop, so that hundreds take no time.
+ */
+export function draftAdvice(
+  entries: readonly AdvisedInDraft[],
+  rainMonths: readonly boolean[],
+): Map<string, EntryAdvice[]> {
+  const peopleOf = ({ content }: AdvisedEntry) => plain(content.record?.work.responsible);
+  const cropOf = ({ content }: AdvisedEntry) => plain(content.crop);
+  const byPeople = grouped(entries, peopleOf);
+  const byCrop = grouped(entries, cropOf);
+  return new Map(
+    entries.map((entry) => {
+      const beside = byPeople.get(peopleOf(entry)) ?? [];
+      const clash = cropClash(entry, byCrop.get(cropOf(entry)) ?? []);
+      const told: (EntryAdvice | false)[] = [
+        forSamePeople(entry, beside).length > 0 && 'same-people',
+        clash !== null && clash.advice,
+        isInCloudySeason(entry.markerRange, rainMonths) && 'cloudy-season',
+        lacksSafetyLine(entry) && 'no-safety-line',
+      ];
+      return [entry.id, told.filter((one) => one !== false)];
+    }),
+  );
+}
+
+function grouped<E>(entries: readonly E[], keyOf: (entry: E) => string): Map<string, E[]> {
+  const groups = new Map<string, E[]>();
+  for (const entry of entries) {
+    const key = keyOf(entry);
+    const group = groups.get(key);
+    if (group) group.push(entry);
+    else groups.set(key, [entry]);
+  }
+  return groups;
 }
 
 /** Does the range of a leading marker lie wholly in months in which cloud usually hides the sky? Day numbers. */

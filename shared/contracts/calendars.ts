@@ -173,6 +173,18 @@ export const ENTRY_WARNINGS = [
 export const entryWarning = z.enum(ENTRY_WARNINGS);
 export type EntryWarning = (typeof ENTRY_WARNINGS)[number];
 
+/** What is told beside an entry's own warnings: it rests on the rest of the draft, on the place and on the sky. */
+export const ENTRY_ADVICE = [
+  'same-people',
+  'crop-not-ripe',
+  'crop-long-ripe',
+  'cloudy-season',
+  'moonlit',
+  'drifted',
+  'no-safety-line',
+] as const;
+const entryAdvice = z.enum(ENTRY_ADVICE);
+
 export const entryWindow = z.strictObject({
   earliest: isoDate,
   bestFrom: isoDate,
@@ -223,6 +235,8 @@ export const entry = z.strictObject({
   mine: z.boolean(),
   /** When it was really done, where that is known. */
   actual: actualDays.optional(),
+  /** What else to look at; left out where there is nothing. */
+  advice: z.array(entryAdvice).optional(),
 });
 export type Entry = z.infer<typeof entry>;
 

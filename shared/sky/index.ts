@@ -25,6 +25,8 @@ import { latitudeOf } from './horizon/horizontal.js';
 import { prepareSkyline } from './horizon/skyline.js';
 import { lookAt } from './look/look-at.js';
 import { moonOverPlaceOf } from './look/moon-over-place.js';
+import { moonThen } from './look/moon-then.js';
+import { skyAt } from './look/sky-at.js';
 import type { Look } from './look/look-types.js';
 import { assertFigures } from './markers/figure-checks.js';
 import { depthAtCrossingOf, expectedDatesOf } from './markers/expected-dates.js';
@@ -71,7 +73,7 @@ import type {
 } from './types.js';
 import { RAD_PER_DEG, DEG_PER_RAD } from './units/angle.js';
 import { SkyRangeError } from './units/sky-range-error.js';
-import type { CompassPoint } from './vocabulary.js';
+import type { CompassPoint, Moonlight } from './vocabulary.js';
 import { WATCH_SIDES, type WatchSide } from './vocabulary.js';
 
 export type * from './types.js';
@@ -303,6 +305,22 @@ export function moonOverPlace(site: Site, jdUt: number): MoonOverPlace {
   assertSite(site);
   assertFinite('jdUt', jdUt);
   return moonOverPlaceOf(site, jdUt);
+}
+
+/** How much the Moon takes from a star or figure at an instant, as `whereToLook` says it: none, some, strong. */
+export function moonlightBeside(
+  markerKey: MarkerKey,
+  site: Site,
+  jdUt: number,
+  figures: readonly Figure[] = [],
+): Moonlight {
+  assertFigures(figures);
+  assertSite(site);
+  assertFinite('jdUt', jdUt);
+  const year = preparedYearOf(civilYearOfDay(Math.round(jdUt)));
+  const sky = skyAt(year, groundOf(site), jdUt);
+  const star = sky.starAt(year.stars.placeOf(markerOf(markerKey, figures).starRef));
+  return moonThen(site, sky, star).moonlight;
 }
 
 /**

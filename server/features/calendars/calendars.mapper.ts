@@ -1,3 +1,4 @@
+import type { EntryAdvice } from '#shared/calendar/advice.js';
 import type { ActualDays } from '#shared/contracts/actual-days.js';
 import type { Calendar, Entry, EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -49,10 +50,11 @@ export interface EntryFacts {
   position: number;
   mine: boolean;
   actual: ActualDays | null;
+  advice: readonly EntryAdvice[];
 }
 
 export function toEntry(facts: EntryFacts): Entry {
-  const { row, content, dates, updatedByName, position, mine, actual } = facts;
+  const { row, content, dates, updatedByName, position, mine, actual, advice } = facts;
   return {
     id: row.id,
     calendarId: row.calendarId,
@@ -64,5 +66,6 @@ export function toEntry(facts: EntryFacts): Entry {
     updatedAt: row.updatedAt.toISOString(),
     mine,
     ...(actual && { actual }),
+    ...(advice.length > 0 && { advice: [...advice] }),
   };
 }

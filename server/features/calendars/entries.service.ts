@@ -32,6 +32,7 @@ import { expectKnownWords, inVillageWords, knownWords } from '../word-lists/know
 import { expectGoodAnchor, expectNothingHangsOn } from './anchored-draft.service.js';
 import { toEntry } from './calendars.mapper.js';
 import { liveEntries, writeOrder } from './calendars.repository.js';
+import { adviceOf } from './draft-advice.service.js';
 import { countOnce } from './count-once.service.js';
 import { orderAmongOthers } from './draft-order.service.js';
 import { expectOpen, lockCalendar, readDraft, recordContribution } from './draft.service.js';
@@ -269,7 +270,7 @@ export class EntriesService {
     calendar: CalendarEntity,
     writtenId?: string,
   ): Promise<EntryList> {
-    const { entries } = await readDraft(manager, this.sky, calendar);
+    const { place, entries } = await readDraft(manager, this.sky, calendar);
     const viewer = await this.viewer(manager, actor);
     const sight = await entrySight(
       manager,
@@ -294,6 +295,7 @@ export class EntriesService {
       manager,
       seen.map(({ row }) => ({ entryId: row.id, content: row.content })),
     );
+    const advice = await adviceOf(manager, this.sky, { calendar, place }, seen);
     const items = seen.map(({ row, dates }, position) => {
       const warnings = colliding.has(row.id)
         ? inOrder(new Set([...dates.warnings, 'windows-overlap' as const]))
@@ -303,7 +305,7 @@ export class EntriesService {
       const mine = mayWrite(viewer, shared);
       const content = withNaming(viewer, shared, told[position]?.content ?? row.content);
       const facts = { row, content, dates: { ...dates, warnings }, updatedByName, position, mine };
-      return toEntry({ ...facts, actual: actual.get(row.id) ?? null });
+      return toEntry({ ...facts, actual: actual.get(row.id) ?? null, advice: advice.get(row.id) ?? [] });
     });
     const keptCount = entries.filter(({ row }) => sight.appearance(thingOf(row)) === 'blank').length;
     return { items, nextCursor: null, keptCount };

@@ -9,6 +9,7 @@ import { figuresOf, type WatchedPlace } from '../places/watched-place.service.js
 import { markerNamesOf } from '../stars/marker-names.service.js';
 import { SkyMarkerYearsService } from '../sky-markers/sky-marker-years.service.js';
 import { SkyYearsService } from '../stars/sky-years.service.js';
+import { SkyAdvice } from './sky-advice.js';
 
 /** Of entries that are counted from others the sky says nothing; whoever has all of them at hand does. */
 const UNTOLD: AnchorDays = { basis: 'gone', spell: null, planned: null };
@@ -19,6 +20,9 @@ export class SkyDatesService {
     private readonly years = new SkyYearsService(),
     private readonly skyMarkers = new SkyMarkerYearsService(),
   ) {}
+
+  /** What of the sky is told beside the dates. */
+  readonly advice = new SkyAdvice(this.years);
 
   /** Dates of entries in their order. Every marker must be in the table; see `knowsMarker`. */
   datesOf(place: WatchedPlace, year: number, contents: readonly EntryInput[]): EntryDates[] {

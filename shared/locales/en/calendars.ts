@@ -174,6 +174,8 @@ export const texts = {
     kept: 'two ways are kept',
     warnings_one: '{{count}} thing to look at',
     warnings_other: '{{count}} things to look at',
+    onlyWarned: 'With something to look at ({{count}})',
+    noneWarned: 'Nothing is left to look at.',
   },
 
   order: {

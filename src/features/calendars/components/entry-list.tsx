@@ -1,4 +1,4 @@
-import { ArrowDownUp, Check, Plus } from 'lucide-react';
+import { ArrowDownUp, Check, CircleAlert, Plus } from 'lucide-react';
 import { useEffect, useRef, useState, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -7,6 +7,8 @@ import { Button } from '#src/ui/button.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
+import { thingsToLookAt } from '../model/advice-of-all.js';
+import type { ShownEntry } from '../model/preview-dates.js';
 import { yearSpan } from '../model/year-span.js';
 import { EntryRow } from './entry-row.js';
 import { OrderList } from './order-list.js';
@@ -16,13 +18,23 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
   const [isOrdering, setIsOrdering] = useState(false);
-  const { calendar, shown, selected, selection, canWrite, answers } = editor;
+  const { calendar, shown, selected, selection, canWrite, answers, advice } = editor;
+  const [isOnlyWarned, setIsOnlyWarned] = useState(false);
+  const warningsOf = (entry: ShownEntry) => thingsToLookAt(entry, advice.get(entry.id));
+  const warned = shown.filter((entry) => warningsOf(entry) > 0);
+  // The open one stays, so that its last warning does not take it away under somebody's hands.
+  const listed = isOnlyWarned
+    ? shown.filter((entry) => warningsOf(entry) > 0 || entry.id === selected?.id)
+    : shown;
   const { isWide } = selection;
   const span = yearSpan(calendar.year);
   const list = useOpenRowInSight(selected?.id ?? null);
   const months = dates.months(calendar.year);
   return (
     <section aria-label={t('editor.list')}>
+      {!isOrdering && (warned.length > 0 || isOnlyWarned) && (
+        <WarnedFilter count={warned.length} isOn={isOnlyWarned} onChange={setIsOnlyWarned} />
+      )}
       {!isWide && !isOrdering && (
         <div className="entry-scale">
           <MonthScale span={span} months={months} />
@@ -32,7 +44,7 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
         <OrderList editor={editor} actions={actions} />
       ) : (
         <ol ref={list} className="entry-list">
-          {shown.map((entry) => (
+          {listed.map((entry) => (
             <li key={entry.id}>
               <EntryRow
                 entry={entry}
@@ -41,6 +53,7 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
                 isOpen={entry.id === selected?.id}
                 isWide={isWide}
                 answers={answers.get(entry.id)}
+                warnings={warningsOf(entry)}
                 span={span}
                 monthStarts={months.slice(1).map(({ dayNumber }) => dayNumber)}
               />
@@ -70,6 +83,33 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
         </div>
       )}
     </section>
+  );
+}
+
+interface WarnedFilterProps {
+  count: number;
+  isOn: boolean;
+  onChange: (isOn: boolean) => void;
+}
+
+/** Shows only those entries in which there is something to look at, and says of how many it is. */
+function WarnedFilter({ count, isOn, onChange }: WarnedFilterProps) {
+  const { t } = useTranslation('calendars');
+  return (
+    <div className="mb-3">
+      <Button
+        icon={isOn ? <Check aria-hidden size={20} /> : <CircleAlert aria-hidden size={20} />}
+        aria-pressed={isOn}
+        onClick={() => {
+          onChange(!isOn);
+        }}
+      >
+        {t('row.onlyWarned', { count })}
+      </Button>
+      <p className="text-small text-umber-soft" role="status">
+        {isOn && count === 0 && t('row.noneWarned')}
+      </p>
+    </div>
   );
 }
 

@@ -19,6 +19,8 @@ export interface EntryRowProps {
   isOpen: boolean;
   isWide: boolean;
   answers: EntryAnswers | undefined;
+  /** How many things there are to look at. */
+  warnings: number;
   span: DaySpan;
   monthStarts: readonly number[];
 }
@@ -63,9 +65,8 @@ export function EntryRow(props: EntryRowProps) {
 }
 
 /** What is to be seen about an entry before it is opened: a sign and words each. */
-function RowMarks({ entry, answers }: EntryRowProps) {
+function RowMarks({ entry, answers, warnings }: EntryRowProps) {
   const { t } = useTranslation('calendars');
-  const warnings = entry.dates?.warnings.length ?? 0;
   return (
     <>
       {entry.unsaved && (

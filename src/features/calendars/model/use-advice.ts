@@ -13,6 +13,7 @@ import {
 import { isStarLead } from '#shared/calendar/entry-model.js';
 import type { DriftEpoch } from '#shared/contracts/drift.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
+import { sameJson } from '#shared/kernel/canonical-json.js';
 import { placesQuery } from '#src/lib/community.js';
 import { moonBesideQuery, sinceThenQuery } from '../api/advice-queries.js';
 import type { ShownEntry } from './preview-dates.js';
@@ -62,15 +63,19 @@ function looked(shown: ShownEntry): Looked {
 }
 
 /** The expected day of the leading star, where a bright Moon stands near it then. */
-function useMoonlitDay(placeId: string, { content, dates }: ShownEntry): string | null {
+function useMoonlitDay(placeId: string, entry: ShownEntry): string | null {
+  const { content, dates, saved } = entry;
   const { lead } = content;
+  const isSaved = saved !== null && sameJson(saved.content.lead, lead);
   const day = dates?.marker?.expected.gregorian ?? null;
   const star = isStarLead(lead) && day !== null ? { ...starOf(lead), date: day } : null;
   const { data: moon } = useQuery({
     ...moonBesideQuery(placeId, star ?? NO_STAR),
-    enabled: star !== null,
+    enabled: star !== null && !isSaved,
   });
-  return star !== null && moon?.moonlight === 'strong' ? day : null;
+  // Of what is saved the list has said it already.
+  const isMoonlit = isSaved ? (saved.advice ?? []).includes('moonlit') : moon?.moonlight === 'strong';
+  return star !== null && isMoonlit ? day : null;
 }
 
 const NO_STAR = { markerKey: '', phenomenon: 'heliacal-rising', date: '' } as const;

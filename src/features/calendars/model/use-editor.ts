@@ -10,13 +10,17 @@ import {
   versionsQuery,
 } from '#src/lib/calendar-queries.js';
 import type { RolesIn } from '#src/lib/roles-in.js';
+import { placesQuery } from '#src/lib/community.js';
 import { entriesQuery } from '../api/calendars-queries.js';
+import { adviceOfAll } from './advice-of-all.js';
 import { answersByEntry, type EntryAnswers } from './elder-requests.js';
 import { contentOf, keptDraft, newDraft } from './entry-draft.js';
 import { draftFor, isStale, orphans, shownEntries } from './shown-entries.js';
 import { specsOf, useSigns } from './signs.js';
 import { NO_EDITS, useEntryEdits } from './use-entry-edits.js';
 import { useSelection } from './use-selection.js';
+
+const NO_MONTHS: readonly boolean[] = [];
 
 /** Officers write the village's entries, elders those that their people keep. */
 export type Writer = Pick<RolesIn, 'isOfficer' | 'isElder'>;
@@ -68,6 +72,9 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
       }),
     [saved, writing, canWrite, selection.openId, newStart, year, markers.data, signs],
   );
+  const { data: places } = useQuery(placesQuery(communityId));
+  const rainMonths = places?.find((place) => place.id === placeId)?.rainMonths ?? NO_MONTHS;
+  const advice = useMemo(() => adviceOfAll(shown, rainMonths), [shown, rainMonths]);
   const open = shown.find((entry) => entry.id === selection.openId) ?? null;
   const selected = open ?? (selection.isWide ? (shown[0] ?? null) : null);
   const edit = selected ? writing.get(selected.id) : undefined;
@@ -90,6 +97,8 @@ export function useEditor(calendar: Calendar, { isOfficer, isElder }: Writer) {
     edits,
     selection,
     shown,
+    /** What to look at besides their days, by entry. */
+    advice,
     selected,
     newStart,
     /** Stays the same when a new entry is saved, so that nobody is thrown out of the field they write in. */

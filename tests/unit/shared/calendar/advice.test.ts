@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import {
   cropClash,
+  draftAdvice,
   driftedDays,
   forSamePeople,
   isInCloudySeason,
@@ -131,5 +132,36 @@ describe('how far a marker moved since people began to go by it', () => {
     ['1628-02-29', '2027-02-28', 0],
   ])('from %s to %s by the day of the civil year', (then, now, days) => {
     expect(driftedDays(then, now)).toBe(days);
+  });
+});
+
+describe('what is told of a whole draft', () => {
+  const NO_RAIN = Array.from({ length: 12 }, () => false);
+  const inDraft = (one: AdvisedEntry, range: { from: number; to: number } | null = null) => ({
+    ...one,
+    markerRange: range,
+  });
+  const sow = entry('sow', window('2027-06-14', '2027-06-30'), { record: record('sow', 'All', 80, 95) });
+  const mend = entry('mend', window('2027-06-16', '2027-06-20'), { record: record('mend-walls', 'all') });
+  const reap = entry('reap', window('2027-07-01', '2027-07-20'), { record: record('harvest') });
+
+  it('is what each of its entries is told beside the others', () => {
+    const told = draftAdvice(
+      [sow, mend, reap].map((one) => inDraft(one)),
+      NO_RAIN,
+    );
+    expect([...told]).toEqual([
+      ['sow', ['same-people']],
+      ['mend', ['same-people']],
+      ['reap', ['crop-not-ripe']],
+    ]);
+  });
+
+  it('speaks of cloud and of a missing caution, and says nothing of an entry without anything to look at', () => {
+    const june = { from: dayNumberFromIso('2027-06-10'), to: dayNumberFromIso('2027-06-14') };
+    const rain = NO_RAIN.map((_, month) => month === 5);
+    const burn = entry('burn', null, { crop: '', record: record('burn') });
+    const told = draftAdvice([inDraft(reap, june), inDraft(burn), inDraft({ ...mend, id: 'm' })], rain);
+    expect([...told.values()]).toEqual([['cloudy-season'], ['no-safety-line'], []]);
   });
 });

@@ -1,10 +1,13 @@
 import { describe, expect, it } from 'vitest';
 
-import { moonPhases } from '#shared/sky/index.js';
+import { dayNumberOf, moonlightBeside, moonPhases, SkyRangeError, whereToLook } from '#shared/sky/index.js';
 import { skyAt } from '#shared/sky/look/sky-at.js';
 import { moonlightOf, moonShapeOf, moonThen } from '#shared/sky/look/moon-then.js';
-import { siteAt } from '#tests/support/sky/builders.js';
+import { settingsWith, siteAt } from '#tests/support/sky/builders.js';
 import { markerAt } from '#tests/support/sky/marker.js';
+
+/** The Pleiades are up before dawn from here on. */
+const FIRST_MORNING = dayNumberOf({ year: 2027, month: 8, day: 1 }, 'gregorian');
 
 describe('the Moon’s shape', () => {
   it('has a word for each quarter and for the days between', () => {
@@ -50,5 +53,24 @@ describe('moonlight', () => {
         before = now;
       }
     }
+  });
+});
+
+describe('the Moon beside a star at an instant', () => {
+  it('takes as much as the watch of that morning says, at its best moment', () => {
+    const site = siteAt(12, 39);
+    const settings = settingsWith();
+    const said = [0, 4, 8, 12, 16, 20, 24, 28].map((days) => {
+      const { best, moon } = whereToLook('pleiades', site, settings, FIRST_MORNING + days, 'dawn');
+      const jdUt = best?.jdUt ?? Number.NaN;
+      return [moon?.moonlight, moonlightBeside('pleiades', site, jdUt)];
+    });
+    expect(said.map(([, beside]) => beside)).toEqual(said.map(([watch]) => watch));
+    expect(new Set(said.flat()).size).toBeGreaterThan(1);
+  });
+
+  it('is asked for a marker and an instant that there are', () => {
+    expect(() => moonlightBeside('hr0', siteAt(12, 39), 2_461_600)).toThrow(SkyRangeError);
+    expect(() => moonlightBeside('pleiades', siteAt(12, 39), Number.NaN)).toThrow(SkyRangeError);
   });
 });
