@@ -2,6 +2,7 @@ import type { Endpoint } from '#shared/contracts/endpoint.js';
 import type { Request, Response, Router } from 'express';
 import type { DataSource } from 'typeorm';
 import type { z } from 'zod';
+import { askingOnce } from '../db/asked-once.js';
 import { withHandOf, withWriteKey, type Actor, type Person } from './actor.js';
 import { looksOnly } from '../policy/viewer.js';
 import { AppError, notFound } from './app-error.js';
@@ -133,7 +134,8 @@ export class Mount {
     this.ids.push(endpoint.id);
     const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
     this.router[method](endpoint.path, async (request: Request, response: Response) => {
-      const handling = handle(request, () => parseCall(endpoint, request), response);
+      const begin = () => handle(request, () => parseCall(endpoint, request), response);
+      const handling = method === 'get' ? askingOnce(begin) : begin();
       this.underway.add(handling);
       const answer = await handling.finally(() => this.underway.delete(handling));
       if (answer instanceof StoredFileReply) await sendStoredFile(request, response, answer.file);

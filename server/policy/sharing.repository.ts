@@ -1,5 +1,6 @@
 import type { SharedItemType, SharingDetails, SharingLevel } from '#shared/contracts/sharing.js';
 import { In, type EntityManager } from 'typeorm';
+import { askedOnceEach } from '../db/asked-once.js';
 import { ItemSharingEntity } from '../db/entities/item-sharing.entity.js';
 import { copyConsents } from './consent.repository.js';
 import type { Shared } from './policy.js';
@@ -10,9 +11,10 @@ export async function sharedById(
   itemType: SharedItemType,
   itemIds: readonly string[],
 ): Promise<Map<string, Shared>> {
-  if (itemIds.length === 0) return new Map();
-  const rows = await manager.findBy(ItemSharingEntity, { itemType, itemId: In([...new Set(itemIds)]) });
-  return new Map(rows.map((row) => [row.itemId, row]));
+  return askedOnceEach<Shared>(manager, `sharing of ${itemType}`, itemIds, async (unknown) => {
+    const rows = await manager.findBy(ItemSharingEntity, { itemType, itemId: In([...unknown]) });
+    return new Map(rows.map((row) => [row.itemId, row]));
+  });
 }
 
 export interface NewSharing {

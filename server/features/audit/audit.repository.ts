@@ -11,7 +11,7 @@ import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import { appearance, maySeeByLevel, type Appearance } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
-import { isWithinSight } from '../sharing/within-sight.service.js';
+import { withinSight } from '../sharing/within-sight.service.js';
 import type { Viewer } from '../../policy/viewer.js';
 import { personNames } from '../people/person-names.service.js';
 
@@ -111,12 +111,12 @@ export async function subjectAppearances(
   for (const type of LEVELLED) {
     const ids = rows.flatMap((row) => (row.subjectType === type && row.subjectId ? [row.subjectId] : []));
     const shared = await sharedById(manager, type, ids);
+    const full = ids.filter((id) => appearance(viewer, shared.get(id)) === 'full');
+    const within = await withinSight(manager, viewer, type, [...new Set(full)]);
     for (const id of ids) {
       const thing = shared.get(id);
       const own = appearance(viewer, thing);
-      const isThere =
-        own !== 'full' || (await isWithinSight(manager, viewer, { itemType: type, itemId: id }));
-      const seen = isThere ? own : 'none';
+      const seen = own !== 'full' || within.has(id) ? own : 'none';
       // What only a missing yes hides leaves its records, without its name, to those who may see it by its level.
       found.set(`${type} ${id}`, seen === 'none' && maySeeByLevel(viewer, thing) ? 'blank' : seen);
     }

@@ -1,4 +1,3 @@
-import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import { In, IsNull, type EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -62,19 +61,15 @@ export async function publishedFacts(
     where: { calendarId: In([...calendarIds]), state: 'published' },
     select: { id: true, calendarId: true, number: true, label: true, publishedAt: true },
   });
-  const facts = new Map<string, PublishedFacts>();
-  for (const { id, calendarId, number, label, publishedAt } of versions) {
-    const rows = await manager.find(VersionEntryEntity, {
-      where: { versionId: id },
-      select: { id: true, entryId: true, bodyText: true },
-    });
-    const things = rows.map(({ entryId, bodyText }) => {
-      const { content } = JSON.parse(bodyText) as VersionEntryBody;
-      return { entryId, markerKey: markerKeyOfLead(content.lead) };
-    });
-    facts.set(calendarId, { number, label: label ?? '', publishedAt, things });
-  }
-  return facts;
+  const things = await frozenThings(
+    manager,
+    versions.map(({ id }) => id),
+  );
+  const facts = versions.map(({ id, calendarId, number, label, publishedAt }) => {
+    const published = { number, label: label ?? '', publishedAt, things: things.get(id) ?? [] };
+    return [calendarId, published] as const;
+  });
+  return new Map(facts);
 }
 
 /** The year of the draft that each began from; those that began empty are missing. */
@@ -82,14 +77,35 @@ export async function rolledFromYears(
   manager: EntityManager,
   calendarIds: readonly string[],
 ): Promise<Map<string, number>> {
-  const rows = await manager.findBy(RolloverEntity, { calendarId: In([...calendarIds]) });
-  const from = await manager.findBy(CalendarEntity, { id: In(rows.map((row) => row.fromCalendarId)) });
-  const yearOf = new Map(from.map(({ id, year }) => [id, year]));
-  return new Map(
-    rows.flatMap(({ calendarId, fromCalendarId }) => {
-      const year = yearOf.get(fromCalendarId);
-      return year === undefined ? [] : [[calendarId, year]];
-    }),
+  const rows = await manager
+    .createQueryBuilder(RolloverEntity, 'rollover')
+    .innerJoin(CalendarEntity, 'earlier', 'earlier.id = rollover.fromCalendarId')
+    .select('rollover.calendarId', 'calendarId')
+    .addSelect('earlier.year', 'year')
+    .where('rollover.calendarId IN (:...calendarIds)', { calendarIds })
+    .getRawMany<{ calendarId: string; year: number }>();
+  return new Map(rows.map(({ calendarId, year }) => [calendarId, year]));
+}
+
+/** Which entries stand in which version, with the star or figure that each goes by. */
+export async function frozenThings(
+  manager: EntityManager,
+  versionIds: readonly string[],
+): Promise<Map<string, SeenThing[]>> {
+  if (versionIds.length === 0) return new Map();
+  const rows = await manager
+    .createQueryBuilder(VersionEntryEntity, 'frozen')
+    .select('frozen.versionId', 'versionId')
+    .addSelect('frozen.entryId', 'entryId')
+    .addSelect("JSON_VALUE(frozen.bodyText, '$.content.lead.markerKey')", 'markerKey')
+    .addSelect("JSON_VALUE(frozen.bodyText, '$.content.lead.spec.markerKey')", 'specKey')
+    .where('frozen.versionId IN (:...versionIds)', { versionIds })
+    .getRawMany<{ versionId: string; entryId: string; markerKey: string | null; specKey: string | null }>();
+  return grouped(
+    rows.map(({ versionId, entryId, markerKey, specKey }) => [
+      versionId,
+      { entryId, markerKey: markerKey ?? specKey },
+    ]),
   );
 }
 

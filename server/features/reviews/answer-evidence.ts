@@ -21,17 +21,24 @@ export async function evidenceOf(
     ...(proof === 'voice' && proofId !== null ? [proofId] : []),
   ]);
   const meetingIds = [...new Set(rows.filter(ofPaper).flatMap(({ proofId }) => proofId ?? []))];
-  const there = await manager.find(AttachmentEntity, {
-    where: [
-      { communityId: viewer.communityId, id: In(voiceIds) },
-      { communityId: viewer.communityId, subjectType: 'meeting', subjectId: In(meetingIds) },
-    ],
-    relations: { parts: true, words: { author: true } },
-    order: { addedAt: 'ASC', id: 'ASC' },
-  });
+  const { communityId } = viewer;
+  const where = [
+    ...(voiceIds.length === 0 ? [] : [{ communityId, id: In(voiceIds) }]),
+    ...(meetingIds.length === 0
+      ? []
+      : [{ communityId, subjectType: 'meeting' as const, subjectId: In(meetingIds) }]),
+  ];
+  const there =
+    where.length === 0
+      ? []
+      : await manager.find(AttachmentEntity, {
+          where,
+          relations: { parts: true, words: { author: true } },
+          order: { addedAt: 'ASC', id: 'ASC' },
+        });
   const seen = new Set((await seenAttachments(manager, viewer, there)).map(({ row }) => row.id));
   const isThere = new Set(there.map(({ id }) => id));
-  const meetings = await manager.findBy(MeetingEntity, { id: In(meetingIds) });
+  const meetings = meetingIds.length === 0 ? [] : await manager.findBy(MeetingEntity, { id: In(meetingIds) });
   const open = (id: string | null) => (id !== null && seen.has(id) ? id : null);
 
   return ({ recordingId, proof, proofId }) => {

@@ -25,6 +25,7 @@ import { personNames } from '../people/person-names.service.js';
 import { frozenContent, frozenEntry, visibleVersion } from '../versions/frozen-content.service.js';
 import { readReviewState, reviewedVersion } from '../versions/review-state.service.js';
 import { seenOfVersion, thingOf } from '../versions/seen-content.service.js';
+import { answersOf } from '../versions/versions.repository.js';
 import { evidenceOf } from './answer-evidence.js';
 import { handOf } from './answer-hand.js';
 import {
@@ -60,10 +61,7 @@ export class AnswersService {
     const review = await readReviewState(manager, version);
     const seen = await this.seenEntries(manager, actor, version);
     const frozen = new Set(seen.map(({ entryId, hash }) => `${entryId} ${hash}`));
-    const given = await manager.find(AnswerEntity, {
-      where: { calendarId },
-      order: { answeredAt: 'ASC', id: 'ASC' },
-    });
+    const given = await answersOf(manager, calendarId);
     const counted = new Set(review.answers.map(keyOf));
     const rows = given.filter(
       (row) => frozen.has(`${row.entryId} ${row.entryHash}`) && counted.has(keyOf(row)),

@@ -1,5 +1,5 @@
 import type { SharedItemType } from '#shared/contracts/sharing.js';
-import type { EntityManager } from 'typeorm';
+import { In, type EntityManager } from 'typeorm';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { figureIdOf } from '../../policy/entry-sight.js';
 import { maySee } from '../../policy/policy.js';
@@ -18,12 +18,44 @@ export async function isWithinSight(
   viewer: Viewer,
   { itemType, itemId }: { itemType: SharedItemType; itemId: string },
 ): Promise<boolean> {
-  if (itemType === 'attachment') return seesWhatItIsAbout(manager, viewer, itemId);
-  if (itemType === 'story') return seesFigure(manager, viewer, itemId);
-  if (itemType !== 'entry') return true;
-  const entry = await manager.findOneBy(EntryEntity, { id: itemId });
-  const figureId = entry === null ? null : figureIdOf(markerKeyOfLead(entry.content.lead));
-  return figureId === null || seesFigure(manager, viewer, figureId);
+  return (await withinSight(manager, viewer, itemType, [itemId])).has(itemId);
+}
+
+/** The same for many things of one kind: those whose ground is there for this person. */
+export async function withinSight(
+  manager: EntityManager,
+  viewer: Viewer,
+  itemType: SharedItemType,
+  itemIds: readonly string[],
+): Promise<Set<string>> {
+  if (itemType === 'entry') return entriesWithinSight(manager, viewer, itemIds);
+  const within = new Set<string>();
+  for (const id of itemIds) {
+    const isThere =
+      itemType === 'attachment'
+        ? await seesWhatItIsAbout(manager, viewer, id)
+        : itemType !== 'story' || (await seesFigure(manager, viewer, id));
+    if (isThere) within.add(id);
+  }
+  return within;
+}
+
+async function entriesWithinSight(
+  manager: EntityManager,
+  viewer: Viewer,
+  entryIds: readonly string[],
+): Promise<Set<string>> {
+  const within = new Set(entryIds);
+  if (within.size === 0) return within;
+  const entries = await manager.find(EntryEntity, {
+    where: { id: In([...within]) },
+    select: { id: true, content: true },
+  });
+  for (const { id, content } of entries) {
+    const figureId = figureIdOf(markerKeyOfLead(content.lead));
+    if (figureId !== null && !(await seesFigure(manager, viewer, figureId))) within.delete(id);
+  }
+  return within;
 }
 
 async function seesFigure(manager: EntityManager, viewer: Viewer, figureId: string): Promise<boolean> {

@@ -13,6 +13,7 @@ import type { CalendarVersionEntity } from '../../db/entities/calendar-version.e
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import type { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import type { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
+import { askedOnce } from '../../db/asked-once.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
@@ -45,6 +46,13 @@ export interface CalendarContent {
   label: string | null;
   state: VersionState | null;
   hash: string | null;
+}
+
+/** A version as it was sealed. */
+interface FrozenContent {
+  readonly header: VersionHeader;
+  readonly entries: readonly VersionEntry[];
+  readonly leaves: string[];
 }
 
 /** The one way to the content of versions and drafts, for screens, comparison and print alike: cut to who asks. */
@@ -200,10 +208,14 @@ export function isVisible(actor: Actor, state: VersionState): boolean {
 }
 
 /** Reads back exactly what was frozen, or throws a BrokenSealError. Whole: what goes out is cut to who asks. */
-export async function frozenContent(
+export function frozenContent(
   manager: EntityManager,
   version: CalendarVersionEntity,
-): Promise<{ header: VersionHeader; entries: VersionEntry[]; leaves: string[] }> {
+): Promise<FrozenContent> {
+  return askedOnce(manager, `frozen content ${version.id}`, () => readFrozen(manager, version));
+}
+
+async function readFrozen(manager: EntityManager, version: CalendarVersionEntity): Promise<FrozenContent> {
   const rows = await frozenEntries(manager, version.id);
   const variants = await frozenVariants(manager, version.id);
   const { headerText, headerHash, headerRedacted, hash, leaves } = version;

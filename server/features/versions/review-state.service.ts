@@ -1,12 +1,11 @@
 import type { ReviewState } from '#shared/calendar/sign-off.js';
 import type { EntityManager } from 'typeorm';
-import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { keptEntryIds } from '../../policy/entry-sight.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import { thingOf } from './seen-content.service.js';
 import { toVersionEntry } from './versions.mapper.js';
-import { findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
+import { answersOf, findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
 
 /**
  * Everything that decides whether a submission is signed off, as it stands in the database now. What is kept by its
@@ -19,7 +18,7 @@ export async function readReviewState(
   const things = await frozenThings(manager, version.id);
   const entries = things.filter(({ isKept }) => !isKept);
   const kept = new Set(things.filter(({ isKept }) => isKept).map(({ entryId }) => entryId));
-  const answers = await manager.findBy(AnswerEntity, { calendarId: version.calendarId });
+  const answers = await answersOf(manager, version.calendarId);
   return {
     rule: version.signOffRule,
     entries: entries.map(({ entryId, hash }) => ({ entryId, hash })),

@@ -1,8 +1,9 @@
 import type { EntityManager } from 'typeorm';
+import { askedOnce } from '../../db/asked-once.js';
+import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { SignatureEntity } from '../../db/entities/signature.entity.js';
-import type { SeenThing } from '../../policy/entry-sight.js';
 import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 
@@ -11,25 +12,40 @@ export async function findVersion(
   calendarId: string,
   number: number,
 ): Promise<CalendarVersionEntity | null> {
-  return manager.findOneBy(CalendarVersionEntity, { calendarId, number });
+  return askedOnce(manager, `version ${calendarId} ${number}`, () =>
+    manager.findOneBy(CalendarVersionEntity, { calendarId, number }),
+  );
 }
 
 export async function frozenEntries(
   manager: EntityManager,
   versionId: string,
 ): Promise<VersionEntryEntity[]> {
-  return manager.find(VersionEntryEntity, { where: { versionId }, order: { position: 'ASC' } });
+  return askedOnce(manager, `frozen entries ${versionId}`, () =>
+    manager.find(VersionEntryEntity, { where: { versionId }, order: { position: 'ASC' } }),
+  );
 }
 
 export async function frozenVariants(
   manager: EntityManager,
   versionId: string,
 ): Promise<VersionVariantEntity[]> {
-  return manager.find(VersionVariantEntity, { where: { versionId }, order: { position: 'ASC' } });
+  return askedOnce(manager, `frozen variants ${versionId}`, () =>
+    manager.find(VersionVariantEntity, { where: { versionId }, order: { position: 'ASC' } }),
+  );
 }
 
 export async function signaturesOf(manager: EntityManager, versionId: string): Promise<SignatureEntity[]> {
-  return manager.find(SignatureEntity, { where: { versionId }, order: { signedAt: 'ASC', id: 'ASC' } });
+  return askedOnce(manager, `signatures ${versionId}`, () =>
+    manager.find(SignatureEntity, { where: { versionId }, order: { signedAt: 'ASC', id: 'ASC' } }),
+  );
+}
+
+/** Everybody's words on the calendar's entries, in the order in which they were said. */
+export async function answersOf(manager: EntityManager, calendarId: string): Promise<AnswerEntity[]> {
+  return askedOnce(manager, `answers ${calendarId}`, () =>
+    manager.find(AnswerEntity, { where: { calendarId }, order: { answeredAt: 'ASC', id: 'ASC' } }),
+  );
 }
 
 export interface EntrySeal {
@@ -68,30 +84,3 @@ export async function earlierSeals(
   }
   return seals;
 }
-
-/** Which entries stand in which version, with the star or figure that each goes by. */
-export async function entriesByVersion(
-  manager: EntityManager,
-  calendarId: string,
-): Promise<Map<string, SeenThing[]>> {
-  const rows = await manager
-    .createQueryBuilder(VersionEntryEntity, 'frozen')
-    .innerJoin('frozen.calendarVersion', 'version')
-    .select('frozen.versionId', 'versionId')
-    .addSelect('frozen.entryId', 'entryId')
-    .addSelect(`JSON_VALUE(frozen.bodyText, '${LEAD_MARKER_PATH}')`, 'markerKey')
-    .addSelect(`JSON_VALUE(frozen.bodyText, '${LEAD_SPEC_PATH}')`, 'specKey')
-    .where('version.calendarId = :calendarId', { calendarId })
-    .getRawMany<{ versionId: string; entryId: string; markerKey: string | null; specKey: string | null }>();
-  const things = new Map<string, SeenThing[]>();
-  for (const { versionId, entryId, markerKey, specKey } of rows) {
-    const thing = { entryId, markerKey: markerKey ?? specKey };
-    const known = things.get(versionId);
-    if (known) known.push(thing);
-    else things.set(versionId, [thing]);
-  }
-  return things;
-}
-
-const LEAD_MARKER_PATH = '$.content.lead.markerKey';
-const LEAD_SPEC_PATH = '$.content.lead.spec.markerKey';

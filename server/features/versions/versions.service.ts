@@ -10,12 +10,13 @@ import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf } from '../../policy/viewer.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { frozenThings } from '../calendars/calendars.repository.js';
 import { frozenContent, isVisible, visibleVersion } from './frozen-content.service.js';
 import { doneSince } from './done-since.service.js';
 import { readReviewState } from './review-state.service.js';
 import { seenOfVersion } from './seen-content.service.js';
 import { toSignature, toSummary } from './versions.mapper.js';
-import { entriesByVersion, signaturesOf } from './versions.repository.js';
+import { signaturesOf } from './versions.repository.js';
 
 /** Reading versions. What changes their state is in publishing.service.ts and in the reviews. */
 export class VersionsService {
@@ -32,7 +33,10 @@ export class VersionsService {
       order: { number: 'DESC' },
     });
     const visible = rows.filter(({ state }) => isVisible(actor, state));
-    const things = await entriesByVersion(manager, calendarId);
+    const things = await frozenThings(
+      manager,
+      visible.map(({ id }) => id),
+    );
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const sight = await entrySight(manager, viewer, [...things.values()].flat());
     const countOf = (row: CalendarVersionEntity) =>
