@@ -70,10 +70,7 @@ async function reset(settings) {
 async function onDatabase(settings, action) {
   const database = isOurs(settings) ? await running(settings, false) : undefined;
   try {
-    const done = await sourceTool(
-      ['server/db-command.ts', action],
-      serverEnvironment(settings, database?.port ?? settings.dbPort),
-    );
+    const done = await sourceTool(['server/db-command.ts', action], serverEnvironment(settings, database));
     return done.code;
   } finally {
     if (database && !database.wasRunning) await database.stop();

@@ -28,7 +28,7 @@ await runScript(async () => {
     if (database && !database.wasRunning) stops.push(database.stop);
     orGoOn();
 
-    const env = serverEnvironment(settings, database?.port ?? settings.dbPort);
+    const env = serverEnvironment(settings, database);
     const server = watchSource('server/main.ts', env);
     stops.push(() => ended(server));
     const screens = start(path.join(projectDir, 'node_modules/.bin/vite'), [], { cwd: projectDir, env });

@@ -40,10 +40,7 @@ await runScript(async () => {
 
     // Without a request for more, the terminal shows what needs a person's attention.
     const quiet = settings.production ? {} : { LOG_LEVEL: 'warn' };
-    const server = await startBuiltServer(
-      { ...quiet, ...serverEnvironment(settings, database?.port ?? settings.dbPort) },
-      { orGoOn },
-    );
+    const server = await startBuiltServer({ ...quiet, ...serverEnvironment(settings, database) }, { orGoOn });
     stops.push(server.stop);
     orGoOn();
     welcome(process.env['PUBLIC_URL'] ?? server.address, !settings.production && process.env['DEMO'] !== '0');

@@ -56,16 +56,17 @@ export function reachOf(settings, dbPort) {
  * What the server needs to know, as environment variables.
  *
  * @param {Settings} settings
- * @param {number} dbPort where the database really listens
+ * @param {{ port: number, socket: string | null }} [database] where it really listens, if it is ours
  */
-export function serverEnvironment(settings, dbPort) {
+export function serverEnvironment(settings, database) {
   const secrets = keptSecrets(settings.dataDir);
   return {
     ...process.env,
     HOST: settings.host,
     PORT: String(settings.port),
     DB_HOST: settings.dbHost,
-    DB_PORT: String(dbPort),
+    DB_PORT: String(database?.port ?? settings.dbPort),
+    ...(database?.socket && { DB_SOCKET: database.socket }),
     DB_NAME: settings.dbName,
     DB_USER: settings.dbUser,
     DB_PASSWORD: settings.dbPassword ?? secrets.databasePassword,

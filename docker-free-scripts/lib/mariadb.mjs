@@ -19,6 +19,9 @@ import { Remedy } from './say.mjs';
 const SERVER = '/usr/sbin/mariadbd';
 const INSTALL = '/usr/bin/mariadb-install-db';
 const UPGRADE = '/usr/bin/mariadb-upgrade';
+const SOCKET = 'mariadb.sock';
+/** What the system takes as the path of a socket. */
+const SOCKET_PATH_MAX_BYTES = 107;
 const LOG_KEEP_BYTES = 5_000_000;
 /** Long, because a database that was cut off in the middle of much work repairs itself first. */
 const READY_WITHIN_MS = 300_000;
@@ -52,6 +55,7 @@ const throwAway = [
 /**
  * @typedef {object} MariaDb
  * @property {number} port
+ * @property {string | null} socket for processes of this machine: half the way of the port
  * @property {number} pid
  * @property {boolean} wasRunning it ran before this call, so whoever started it also stops it
  * @property {Promise<unknown>} exited
@@ -101,7 +105,7 @@ export async function startMariaDb(wanted) {
       ...always,
       ...(wanted.durability === 'kept' ? kept : throwAway),
       `--datadir=${dataIn(folder)}`,
-      '--socket=mariadb.sock', // inside the data folder; a whole path may hold 107 bytes only
+      `--socket=${SOCKET}`, // inside the data folder
       '--pid-file=mariadb.pid',
       `--port=${port}`,
       `--init-file=${initFile}`,
@@ -120,6 +124,7 @@ export async function startMariaDb(wanted) {
   }
   return {
     port,
+    socket: socketIn(folder),
     pid: server.pid,
     wasRunning: false,
     exited: server.exited,
@@ -150,6 +155,8 @@ export function runningIn(folder) {
   const exited = gone();
   return {
     port,
+    // Whoever started it may have given the account no right to come this way.
+    socket: null,
     pid,
     wasRunning: true,
     exited,
@@ -168,6 +175,12 @@ export function logFile(folder) {
 /** @param {string} folder */
 function dataIn(folder) {
   return path.join(folder, 'data');
+}
+
+/** Null where the folder lies too deep for a socket to be reached by its path. @param {string} folder */
+function socketIn(folder) {
+  const file = path.resolve(dataIn(folder), SOCKET);
+  return Buffer.byteLength(file) <= SOCKET_PATH_MAX_BYTES ? file : null;
 }
 
 /** @param {number} pid the command line of a process, nothing when there is none @returns {string[]} */
@@ -204,12 +217,15 @@ async function createWhereMissing(folder) {
  * @param {Wanted['account']} account
  */
 function startStatements({ name, user, password, rootPassword }) {
-  const app = `'${user}'@'127.0.0.1'`;
+  // By the port, and by the socket.
+  const accounts = ['127.0.0.1', 'localhost'].map((host) => `'${user}'@'${host}'`);
   return [
     `CREATE DATABASE IF NOT EXISTS \`${name}\` CHARACTER SET utf8mb4 COLLATE utf8mb4_uca1400_as_ci;`,
-    `CREATE USER IF NOT EXISTS ${app} IDENTIFIED BY '${quoted(password)}';`,
-    `ALTER USER ${app} IDENTIFIED BY '${quoted(password)}';`,
-    `GRANT ALL ON \`${name.replaceAll('_', '\\_')}%\`.* TO ${app};`,
+    ...accounts.flatMap((account) => [
+      `CREATE USER IF NOT EXISTS ${account} IDENTIFIED BY '${quoted(password)}';`,
+      `ALTER USER ${account} IDENTIFIED BY '${quoted(password)}';`,
+      `GRANT ALL ON \`${name.replaceAll('_', '\\_')}%\`.* TO ${account};`,
+    ]),
     `ALTER USER 'root'@'localhost' IDENTIFIED BY '${quoted(rootPassword)}';`,
     `DELETE FROM mysql.global_priv WHERE User = 'root' AND Host <> 'localhost';`,
     'FLUSH PRIVILEGES;',

@@ -42,7 +42,13 @@ export async function restoreBackup(settings, dbPort, { from, replace, withdrawa
     await asker.end();
   }
   replaceAttachments(settings.dataDir, path.join(from, parts.attachments));
-  const done = await sourceTool(['server/db-command.ts', 'restored'], serverEnvironment(settings, dbPort));
+  const done = await sourceTool(
+    ['server/db-command.ts', 'restored'],
+    serverEnvironment(settings, {
+      port: dbPort,
+      socket: null,
+    }),
+  );
   if (done.code === 0)
     say(`The villages are as they were on ${manifest.madeAt}, without what was taken back since.`);
   return done.code;

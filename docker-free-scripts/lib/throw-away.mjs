@@ -8,6 +8,7 @@ import { randomText } from './secrets.mjs';
  * @typedef {object} ThrowAwayDatabase
  * @property {string} folder
  * @property {number} port
+ * @property {string | null} socket
  * @property {number} pid
  * @property {string} user may make and drop databases whose name begins with `dawnpeg`
  * @property {string} password
@@ -38,6 +39,7 @@ export async function startThrowAway({ durability = 'throw-away' } = {}) {
     return {
       folder,
       port,
+      socket: server.socket,
       pid: server.pid,
       user: account.user,
       password: account.password,

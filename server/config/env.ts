@@ -90,6 +90,10 @@ const variables = z.object({
     .regex(/^[\w.:-]+$/, 'must be the host name of the database, such as 127.0.0.1')
     .default('127.0.0.1'),
   DB_PORT: port('must be a port number between 1 and 65535, such as 3317').default(3317),
+  DB_SOCKET: z
+    .string()
+    .regex(/^\/.{1,106}$/, "must be the whole path of the database's socket, 107 characters at most")
+    .optional(),
   DB_NAME: z
     .string()
     .regex(/^[a-z][a-z0-9_]{0,47}$/, 'must be a database name of small letters, digits and underscores')
@@ -174,6 +178,7 @@ export function parseConfig(values: Readonly<Record<string, string | undefined>>
     database: Object.freeze({
       host: env.DB_HOST,
       port: env.DB_PORT,
+      socketPath: env.DB_SOCKET ?? null,
       name: env.DB_NAME,
       user: env.DB_USER,
       password: env.DB_PASSWORD,

@@ -5,6 +5,8 @@ import { MIGRATIONS } from './migrations/index.js';
 export interface DatabaseOptions {
   readonly host: string;
   readonly port: number;
+  /** Where the database is on the same machine: half the way of host and port, which count where this is missing. */
+  readonly socketPath?: string | null;
   readonly name: string;
   readonly user: string;
   readonly password: string;
@@ -24,6 +26,7 @@ export function createDataSource(options: DatabaseOptions): DataSource {
     type: 'mariadb',
     host: options.host,
     port: options.port,
+    ...(options.socketPath ? { socketPath: options.socketPath } : {}),
     database: options.name,
     username: options.user,
     password: options.password,

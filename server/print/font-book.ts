@@ -33,24 +33,14 @@ export interface TextRun {
 }
 
 const resolve = createRequire(import.meta.url).resolve;
-const files = new Map<string, Buffer>();
 const fonts = new Map<string, Font>();
 
-/** The bytes of a typeface, read once. */
-export function fontFile(face: FaceName, weight: FontWeight): Buffer {
-  const path = FACES[face][weight];
-  const known = files.get(path);
-  if (known) return known;
-  const bytes = readFileSync(resolve(path));
-  files.set(path, bytes);
-  return bytes;
-}
-
+/** A typeface as it is drawn with, read once for the whole process. */
 export function fontOf(face: FaceName, weight: FontWeight): Font {
   const key = `${face}-${weight}`;
   const known = fonts.get(key);
   if (known) return known;
-  const font = create(fontFile(face, weight));
+  const font = create(readFileSync(resolve(FACES[face][weight])));
   if (!('layout' in font)) throw new Error(`${key} is a collection, not a single typeface`);
   fonts.set(key, font);
   return font;

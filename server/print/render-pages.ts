@@ -4,7 +4,7 @@ import { pathsOf } from '#shared/sheet/page-paths.js';
 import type { PathOp } from '#shared/sheet/page-paths.js';
 import type { DrawnPage, Ink, TextPrimitive } from '#shared/sheet/primitives.js';
 import { MM_PER_PT } from '#shared/sheet/units.js';
-import { fontFile, textRuns } from './font-book.js';
+import { fontOf, textRuns } from './font-book.js';
 import type { FaceName, FontWeight } from './font-book.js';
 import { fontMeasurer } from './font-measurer.js';
 
@@ -146,7 +146,8 @@ function registered(doc: PDFKit.PDFDocument, face: FaceName, weight: FontWeight)
   const known = registeredFonts.get(doc) ?? new Set<string>();
   registeredFonts.set(doc, known);
   if (!known.has(name)) {
-    doc.registerFont(name, fontFile(face, weight));
+    // One that is read already serves every file: its tables are not gone through again. The types name bytes alone.
+    doc.registerFont(name, fontOf(face, weight) as unknown as Buffer);
     known.add(name);
   }
   return name;

@@ -59,13 +59,21 @@ describe('what every endpoint says to everybody', () => {
     },
   );
 
+  /** Most words are of one make and found in one go; the others are looked for one by one. */
+  function plantedIn(text: string): Planted[] {
+    const ofOneMake = new Set(text.match(/Zq\d+xw/gu));
+    return village.planted.filter(({ word }) =>
+      /^Zq\d+xw$/u.test(word) ? ofOneMake.has(word) : text.includes(word),
+    );
+  }
+
   async function askAll(endpoint: Endpoint, person: Someone) {
     const found = new Set<Planted>();
     let answered = false;
     for (const path of pathsOf(endpoint, village)) {
       const text = await wholeTextOf(village.people[person], path, endpoint);
       answered ||= !isRefusal(text);
-      for (const thing of village.planted) if (text.includes(thing.word)) found.add(thing);
+      for (const thing of plantedIn(text)) found.add(thing);
     }
     return { person, found, answered };
   }

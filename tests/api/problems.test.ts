@@ -154,6 +154,8 @@ describe('while the database cannot be reached', () => {
     line = await openLine(server.port);
     dataSource = createDataSource({
       ...server,
+      // Through the line that can be cut.
+      socketPath: null,
       port: line.port,
       name: `dawnpeg_test_${process.env['VITEST_POOL_ID'] ?? '1'}`,
       poolSize: 2,

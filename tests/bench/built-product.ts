@@ -17,7 +17,12 @@ export async function onBuiltProduct<T>(work: (address: string) => Promise<T>): 
     const server = await startBuiltServer({
       ...process.env,
       ...{ NODE_ENV: 'development', HOST: '127.0.0.1', PORT: String(await freePort()), PUBLIC_URL: '' },
-      ...{ DB_HOST: '127.0.0.1', DB_PORT: String(database.port), DB_NAME: database.name },
+      ...{
+        DB_HOST: '127.0.0.1',
+        DB_PORT: String(database.port),
+        DB_SOCKET: database.socket ?? '',
+        DB_NAME: database.name,
+      },
       ...{ DB_USER: database.user, DB_PASSWORD: database.password, DATA_DIR: dataDir },
       ...{ SESSION_SECRET: randomText(), DEMO: '1', FIXED_NOW: JOURNEY_NOW, LOG_LEVEL: 'error' },
     });

@@ -13,6 +13,7 @@ const VARIABLE = 'JOURNEY_DATABASE';
 
 interface JourneyDatabase {
   readonly port: number;
+  readonly socket: string | null;
   readonly user: string;
   readonly password: string;
   /** The demo villages as a file, made once: every story begins with a copy of them. */
@@ -22,7 +23,7 @@ interface JourneyDatabase {
 /** Playwright's global setup: the product is built, one throw-away MariaDB serves all journeys, the demo is made once. */
 export default async function setup(): Promise<() => Promise<void>> {
   await ensureBuilt();
-  const { port, user, password, name, remove } = await startThrowAway();
+  const { port, socket, user, password, name, remove } = await startThrowAway();
   const folder = mkdtempSync(path.join(os.tmpdir(), `dawnpeg-test-${process.pid}-files-`));
   const villages = path.join(folder, 'villages.sql.gz');
   const end = async () => {
@@ -30,7 +31,7 @@ export default async function setup(): Promise<() => Promise<void>> {
     rmSync(folder, { recursive: true, force: true });
   };
   try {
-    const database = { port, user, password, villages } satisfies JourneyDatabase;
+    const database = { port, socket, user, password, villages } satisfies JourneyDatabase;
     const server = await startBuiltServer({
       ...process.env,
       ...(await journeyEnvironment(folder)),
@@ -57,10 +58,11 @@ export async function freshJourneyDatabase(name: string): Promise<NodeJS.Process
   return reach(database, name);
 }
 
-function reach({ port, user, password }: JourneyDatabase, name: string): NodeJS.ProcessEnv {
+function reach({ port, socket, user, password }: JourneyDatabase, name: string): NodeJS.ProcessEnv {
   return {
     DB_HOST: '127.0.0.1',
     DB_PORT: String(port),
+    DB_SOCKET: socket ?? '',
     DB_NAME: name,
     DB_USER: user,
     DB_PASSWORD: password,

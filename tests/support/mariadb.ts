@@ -5,6 +5,7 @@ import { startThrowAway } from '../../docker-free-scripts/lib/throw-away.mjs';
 export interface TestServer {
   readonly host: string;
   readonly port: number;
+  readonly socketPath?: string;
   readonly user: string;
   readonly password: string;
 }
@@ -21,6 +22,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
   project.provide('mariadb', {
     host: '127.0.0.1',
     port: server.port,
+    ...(server.socket === null ? {} : { socketPath: server.socket }),
     user: server.user,
     password: server.password,
   });

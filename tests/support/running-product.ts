@@ -72,6 +72,7 @@ function environment(
     PORT: String(port),
     DB_HOST: '127.0.0.1',
     DB_PORT: String(database.port),
+    DB_SOCKET: database.socket ?? '',
     DB_NAME: database.name,
     DB_USER: database.user,
     DB_PASSWORD: database.password,

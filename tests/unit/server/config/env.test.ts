@@ -64,6 +64,7 @@ describe('the settings', () => {
     ['PORT', { ...needed, PORT: '65536' }],
     ['PORT', { ...needed, PORT: '80a' }],
     ['DB_PORT', { ...needed, DB_PORT: '-1' }],
+    ['DB_SOCKET', { ...needed, DB_SOCKET: 'mariadb.sock' }],
     ['DB_NAME', { ...needed, DB_NAME: 'a`b' }],
     ['PUBLIC_URL', { ...needed, PUBLIC_URL: 'calendar.example' }],
     ['TRUST_PROXY', { ...needed, TRUST_PROXY: 'yes' }],
