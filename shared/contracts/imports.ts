@@ -123,6 +123,7 @@ export const villageCopy = z.strictObject({
       comes: z.boolean(),
       /** At the other place; null where it does not come, or has no day there. */
       window: entryWindow.nullable(),
+      warnings: z.array(entryWarning),
       notes: z.array(z.enum(COPY_NOTES)),
     }),
   ),

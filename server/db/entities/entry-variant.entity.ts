@@ -1,20 +1,12 @@
 import type { VariantInput } from '#shared/contracts/variants.js';
-import {
-  Column,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryColumn,
-  VersionColumn,
-  type Relation,
-} from 'typeorm';
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import { instantColumn } from './columns.js';
 import { EntryEntity } from './entry.entity.js';
+import { WrittenEntity } from './written-entity.js';
 
 /** Another keeper's timing of an entry of a draft. */
 @Entity({ name: 'entry_variant' })
-export class EntryVariantEntity {
+export class EntryVariantEntity extends WrittenEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
@@ -31,13 +23,4 @@ export class EntryVariantEntity {
 
   @Column({ name: 'added_at', ...instantColumn })
   addedAt!: Date;
-
-  @Column({ name: 'updated_by', type: 'uuid' })
-  updatedBy!: string;
-
-  @Column({ name: 'updated_at', ...instantColumn })
-  updatedAt!: Date;
-
-  @VersionColumn({ type: 'int' })
-  version!: number;
 }

@@ -1,21 +1,13 @@
 import type { EntryInput } from '#shared/contracts/calendars.js';
-import {
-  Column,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryColumn,
-  VersionColumn,
-  type Relation,
-} from 'typeorm';
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import { CalendarEntity } from './calendar.entity.js';
 import { instantColumn } from './columns.js';
+import { WrittenEntity } from './written-entity.js';
 
 /** One line of a draft. */
 @Entity({ name: 'entry' })
 @Index('entry_calendar_position', ['calendarId', 'position'])
-export class EntryEntity {
+export class EntryEntity extends WrittenEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
@@ -39,13 +31,4 @@ export class EntryEntity {
   /** Set back to an old version then: answers to what stood in versions before do not count for it. */
   @Column({ name: 'restored_at', ...instantColumn, nullable: true })
   restoredAt!: Date | null;
-
-  @Column({ name: 'updated_by', type: 'uuid' })
-  updatedBy!: string;
-
-  @Column({ name: 'updated_at', ...instantColumn })
-  updatedAt!: Date;
-
-  @VersionColumn({ type: 'int' })
-  version!: number;
 }

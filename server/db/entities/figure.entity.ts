@@ -1,20 +1,12 @@
 import type { FigureInput, FigureName, FigureVariant } from '#shared/contracts/figures.js';
-import {
-  Column,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryColumn,
-  VersionColumn,
-  type Relation,
-} from 'typeorm';
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import { instantColumn } from './columns.js';
 import { CommunityEntity } from './community.entity.js';
+import { WrittenEntity } from './written-entity.js';
 
 /** A figure of a village: names, story, and what carries its dates. */
 @Entity({ name: 'figure' })
-export class FigureEntity {
+export class FigureEntity extends WrittenEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
@@ -51,13 +43,4 @@ export class FigureEntity {
   /** Set when an officer took it out; drafts that still go by it keep their dates, and it can be put back. */
   @Column({ name: 'taken_out_at', ...instantColumn, nullable: true })
   takenOutAt!: Date | null;
-
-  @Column({ name: 'updated_by', type: 'uuid' })
-  updatedBy!: string;
-
-  @Column({ name: 'updated_at', ...instantColumn })
-  updatedAt!: Date;
-
-  @VersionColumn({ type: 'int' })
-  version!: number;
 }

@@ -1,23 +1,15 @@
 import type { signWords } from '#shared/contracts/event-record.js';
-import {
-  Column,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryColumn,
-  VersionColumn,
-  type Relation,
-} from 'typeorm';
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import type { z } from 'zod';
 import { instantColumn } from './columns.js';
 import { CommunityEntity } from './community.entity.js';
+import { WrittenEntity } from './written-entity.js';
 
 export type SignWords = z.infer<typeof signWords>;
 
 /** A sign of nature in a village's list, to which its entries refer. */
 @Entity({ name: 'sign' })
-export class SignEntity {
+export class SignEntity extends WrittenEntity {
   @PrimaryColumn({ type: 'uuid' })
   id!: string;
 
@@ -35,13 +27,4 @@ export class SignEntity {
   /** Set when it was taken out of the list; versions keep its words, and it can be put back. */
   @Column({ name: 'taken_out_at', ...instantColumn, nullable: true })
   takenOutAt!: Date | null;
-
-  @Column({ name: 'updated_by', type: 'uuid' })
-  updatedBy!: string;
-
-  @Column({ name: 'updated_at', ...instantColumn })
-  updatedAt!: Date;
-
-  @VersionColumn({ type: 'int' })
-  version!: number;
 }

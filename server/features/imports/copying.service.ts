@@ -93,11 +93,14 @@ export class CopyingService {
       return own ? [{ id, lead: content.lead, timing: content, dates: own }] : [];
     });
     const counted = anchoredDates(computed, year, { mayHang: () => true, actualOf: () => null });
-    const windowOf = new Map(computed.map(({ id, dates: own }) => [id, (counted.get(id) ?? own).window]));
-    return copied.map(({ fromId, title, content, notes }) => ({
-      ...{ title, notes, comes: content !== null, protectiveWatch: content?.protectiveWatch ?? false },
-      window: windowOf.get(landing.get(fromId)?.id ?? '') ?? null,
-    }));
+    const datesOf = new Map(computed.map(({ id, dates: own }) => [id, counted.get(id) ?? own]));
+    return copied.map(({ fromId, title, content, notes }) => {
+      const own = datesOf.get(landing.get(fromId)?.id ?? '');
+      return {
+        ...{ title, notes, comes: content !== null, protectiveWatch: content?.protectiveWatch ?? false },
+        ...{ window: own?.window ?? null, warnings: own?.warnings ?? [] },
+      };
+    });
   }
 }
 

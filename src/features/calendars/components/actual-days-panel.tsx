@@ -1,10 +1,8 @@
-import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { actualDaysInput, type ActualDaysInput } from '#shared/contracts/actual-days.js';
 import type { Entry } from '#shared/contracts/calendars.js';
-import { ApiProblem } from '#src/lib/api-problem.js';
 import { useDateWords } from '#src/lib/date-words.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
+import { useWrittenForm } from '#src/lib/written-form.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
 import { More } from '#src/ui/fold.js';
@@ -24,31 +22,20 @@ const NOTHING: ActualDaysInput = { from: '', to: null, saidBy: '', plots: '' };
 export function ActualDaysPanel({ calendarId, year, entry }: ActualDaysPanelProps) {
   const { t } = useTranslation(['anchors', 'common']);
   const dates = useDateWords();
-  const words = useProblemWords();
   const say = useToast();
   const { put, remove } = useActualDays(calendarId, entry.id);
   const { actual } = entry;
   const start = actual ? inputOf(actual) : NOTHING;
-  const [written, setWritten] = useState(start);
-  const [problems, setProblems] = useState<ReadonlyMap<string, string>>(new Map());
-  const set = (patch: Partial<ActualDaysInput>) => {
-    setWritten((before) => ({ ...before, ...patch }));
-  };
-  const refuse = (cause: unknown) => {
-    const errors = cause instanceof ApiProblem ? cause.errors : [];
-    setProblems(new Map(errors.map(({ field, code, message }) => [field, words.field(code, message)])));
-    if (errors.length === 0) say(words.problem(cause));
+  const { written, set, at, checked, refuse } = useWrittenForm<ActualDaysInput>(actualDaysInput, start);
+  const sayRefusal = (cause: unknown) => {
+    const refusal = refuse(cause);
+    if (refusal !== null) say(refusal);
   };
   const save = () => {
-    const parsed = actualDaysInput.safeParse(written);
-    if (!parsed.success) {
-      const { issues } = parsed.error;
-      setProblems(new Map(issues.map(({ path, message }) => [path.join('.'), words.field(message)])));
-      return;
-    }
-    setProblems(new Map());
-    put.mutate(parsed.data, {
-      onError: refuse,
+    const input = checked();
+    if (input === null) return;
+    put.mutate(input, {
+      onError: sayRefusal,
       onSuccess: () => {
         say(t('actual.saved'));
       },
@@ -78,7 +65,7 @@ export function ActualDaysPanel({ calendarId, year, entry }: ActualDaysPanelProp
                 min={`${year - 1}-01-01`}
                 max={`${year + 1}-12-31`}
                 value={written[field] ?? ''}
-                problem={problems.get(field)}
+                problem={at(field)}
                 onChange={(event) => {
                   const day = event.currentTarget.value;
                   set(field === 'from' ? { from: day } : { to: day === '' ? null : day });
@@ -90,7 +77,7 @@ export function ActualDaysPanel({ calendarId, year, entry }: ActualDaysPanelProp
                 key={field}
                 label={t(`actual.${field}`)}
                 value={written[field]}
-                problem={problems.get(field)}
+                problem={at(field)}
                 onChange={(value) => {
                   set({ [field]: value });
                 }}
@@ -107,9 +94,9 @@ export function ActualDaysPanel({ calendarId, year, entry }: ActualDaysPanelProp
                 busy={remove.isPending}
                 onClick={() => {
                   remove.mutate(undefined, {
-                    onError: refuse,
+                    onError: sayRefusal,
                     onSuccess: () => {
-                      setWritten(NOTHING);
+                      set(NOTHING);
                       say(t('actual.removed'));
                     },
                   });

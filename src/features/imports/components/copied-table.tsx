@@ -1,12 +1,11 @@
 import { useTranslation } from 'react-i18next';
 import type { VillageCopy } from '#shared/contracts/imports.js';
-import { useEntryWords } from '#src/lib/entry-words.js';
 import { Table } from '#src/ui/table.js';
+import { LandingDays } from './landing-days.js';
 
 /** What becomes of each entry in the other village; what stays behind says why. */
 export function CopiedTable({ entries, year }: { entries: VillageCopy['entries']; year: number }) {
   const { t } = useTranslation('imports');
-  const words = useEntryWords();
   if (entries.length === 0) return <p role="status">{t('copy.nothing')}</p>;
   return (
     <Table caption={t('copy.caption')}>
@@ -21,9 +20,7 @@ export function CopiedTable({ entries, year }: { entries: VillageCopy['entries']
           <tr key={`${String(index)} ${entry.title}`}>
             <th scope="row">{entry.title}</th>
             <td>
-              {entry.comes && (
-                <p>{entry.window ? words.window(entry, entry.window, year) : t('lines.noDay')}</p>
-              )}
+              {entry.comes && <LandingDays coming={entry} year={year} />}
               {entry.notes.map((note) => (
                 <p key={note} className="text-small">
                   {t(`copy.note.${note}`)}

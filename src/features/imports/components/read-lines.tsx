@@ -10,6 +10,7 @@ import { useProblemWords } from '#src/lib/problem-words.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { Table } from '#src/ui/table.js';
+import { LandingDays } from './landing-days.js';
 import { useImportColumnWords } from '../model/use-import-words.js';
 
 interface ReadLinesProps {
@@ -93,15 +94,10 @@ function Becomes({ line, year, markers }: BecomesProps) {
       </ul>
     );
   }
-  const { lead, window, warnings } = line;
-  const noDay = warnings.includes('waits-for-actual-day')
-    ? 'lines.waits'
-    : warnings.includes('anchor-gone') || warnings.includes('anchor-without-days')
-      ? 'lines.anchorWithoutDays'
-      : 'lines.noDay';
+  const { lead } = line;
   return (
     <>
-      <p>{window === null ? t(noDay) : words.window(line, window, year)}</p>
+      <LandingDays coming={line} year={year} />
       {lead !== null && !('entryId' in lead) && <p className="text-small">{words.lead({ lead }, markers)}</p>}
     </>
   );

@@ -3,13 +3,12 @@ import { useEffect } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
 import type { OpenPage as Opened } from '#shared/contracts/open-page.js';
-import { ApiProblem } from '#src/lib/api-problem.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { PageOnItsWay } from '#src/lib/page-on-its-way.js';
 import { usePageTitle } from '#src/lib/page-title.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board, Care } from '#src/ui/surfaces.js';
-import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
+import { EmptyState } from '#src/ui/waiting.js';
 import { openPageQuery } from '../api/open-page-api.js';
 import { OpenEntries } from './open-entries.js';
 import { usePlaceWords } from './use-place-words.js';
@@ -18,29 +17,18 @@ import { usePlaceWords } from './use-place-words.js';
 export function OpenPage() {
   const { t } = useTranslation('open');
   const [query] = useSearchParams();
-  const words = useProblemWords();
   const { data, error, refetch } = useQuery(openPageQuery(query.get('page') ?? ''));
   useNotForSearchEngines();
   usePageTitle(data ? t('title', { village: data.communityName }) : t('titleAlone'));
   if (data !== undefined) return <Shown page={data} />;
-  const isGone = error instanceof ApiProblem && error.slug === 'not-found';
   return (
-    <Page>
-      <Mast title={t('titleAlone')} />
-      {error === null && (
-        <Board>
-          <Skeleton lines={6} />
-        </Board>
-      )}
-      {isGone && (
-        <Board>
-          <EmptyState title={t('gone')}>{t('goneWhy')}</EmptyState>
-        </Board>
-      )}
-      {error !== null && !isGone && (
-        <TroubleNote title={t('trouble')} sentence={words.problem(error)} onRetry={() => void refetch()} />
-      )}
-    </Page>
+    <PageOnItsWay
+      title={t('titleAlone')}
+      error={error}
+      gone={{ title: t('gone'), why: t('goneWhy') }}
+      trouble={t('trouble')}
+      onRetry={() => void refetch()}
+    />
   );
 }
 

@@ -2,15 +2,13 @@ import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
 import type { RolloverReport } from '#shared/contracts/rollovers.js';
-import { ApiProblem } from '#src/lib/api-problem.js';
 import { useDateWords } from '#src/lib/date-words.js';
+import { PageOnItsWay } from '#src/lib/page-on-its-way.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import { paths } from '#src/lib/paths.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
-import { EmptyState, Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { rolloverQuery } from '../api/rollovers-queries.js';
 import { rolledGroups } from '../model/rolled-groups.js';
 import { RolledTable } from './rolled-table.js';
@@ -19,27 +17,17 @@ import { RolledTable } from './rolled-table.js';
 export function RolloverPage() {
   const { t } = useTranslation('rollovers');
   const { calendarId = '' } = useParams();
-  const words = useProblemWords();
   const { data, error, refetch } = useQuery(rolloverQuery(calendarId));
-  const isGone = error instanceof ApiProblem && error.slug === 'not-found';
   if (data !== undefined) return <Report report={data} />;
   return (
-    <Page>
-      <Mast title={t('counts.title')} backTo={paths.calendars()} />
-      {error === null && (
-        <Board>
-          <Skeleton lines={6} />
-        </Board>
-      )}
-      {isGone && (
-        <Board>
-          <EmptyState title={t('gone')}>{t('goneWhy')}</EmptyState>
-        </Board>
-      )}
-      {error !== null && !isGone && (
-        <TroubleNote title={t('trouble')} sentence={words.problem(error)} onRetry={() => void refetch()} />
-      )}
-    </Page>
+    <PageOnItsWay
+      title={t('counts.title')}
+      backTo={paths.calendars()}
+      error={error}
+      gone={{ title: t('gone'), why: t('goneWhy') }}
+      trouble={t('trouble')}
+      onRetry={() => void refetch()}
+    />
   );
 }
 

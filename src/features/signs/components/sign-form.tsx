@@ -3,10 +3,10 @@ import { useTranslation } from 'react-i18next';
 import { signInput, type Sign, type SignInput } from '#shared/contracts/signs.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { ApiProblem } from '#src/lib/api-problem.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
 import { SharingFields } from '#src/lib/sharing-fields.js';
 import { NEW_SIGN, SignWordFields } from '#src/lib/sign-word-fields.js';
 import { useNewSign } from '#src/lib/use-new-sign.js';
+import { useWrittenForm } from '#src/lib/written-form.js';
 import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
@@ -22,41 +22,25 @@ interface SignFormProps {
 /** A sign of the village's list, to be written. What somebody else saved meanwhile is said, and nothing typed is lost. */
 export function SignForm({ communityId, sign, onDone }: SignFormProps) {
   const { t } = useTranslation('signs');
-  const words = useProblemWords();
   const say = useToast();
   const add = useNewSign(communityId);
   const { change } = useSignChanges(communityId);
-  const [written, setWritten] = useState<SignInput>(() => inputOf(sign));
+  const { written, set, at, checked, refuse } = useWrittenForm<SignInput>(signInput, () => inputOf(sign));
   const [version, setVersion] = useState(sign?.version ?? 1);
-  const [problems, setProblems] = useState<ReadonlyMap<string, string>>(new Map());
   const [overall, setOverall] = useState<string | null>(null);
-  const at = (field: string) => problems.get(field);
-  const set = (patch: Partial<SignInput>) => {
-    setWritten((before) => ({ ...before, ...patch }));
-  };
-  const refuse = (cause: unknown) => {
-    const errors = cause instanceof ApiProblem ? cause.errors : [];
-    setProblems(new Map(errors.map(({ field, code, message }) => [field, words.field(code, message)])));
-    const current = cause instanceof ApiProblem ? currentOf(cause) : null;
-    if (current) setVersion(current.version);
-    setOverall(
-      current ? t('form.stale', { name: current.name }) : errors.length > 0 ? null : words.problem(cause),
-    );
-  };
   const save = async () => {
-    const parsed = signInput.safeParse(written);
-    if (!parsed.success) {
-      const { issues } = parsed.error;
-      setProblems(new Map(issues.map(({ path, message }) => [path.join('.'), words.field(message)])));
-      return;
-    }
+    const input = checked();
+    if (input === null) return;
     try {
-      if (sign === null) await add.mutateAsync(parsed.data);
-      else await change.mutateAsync({ signId: sign.id, input: { ...parsed.data, version } });
+      if (sign === null) await add.mutateAsync(input);
+      else await change.mutateAsync({ signId: sign.id, input: { ...input, version } });
       say(t('form.saved'));
       onDone();
     } catch (cause) {
-      refuse(cause);
+      const refusal = refuse(cause);
+      const current = cause instanceof ApiProblem ? currentOf(cause) : null;
+      if (current) setVersion(current.version);
+      setOverall(current ? t('form.stale', { name: current.name }) : refusal);
     }
   };
   const { sharingLevel: level, sharing: details = PLAIN_DETAILS } = written;

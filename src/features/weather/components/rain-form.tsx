@@ -1,8 +1,7 @@
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { rainInput, type RainInput } from '#shared/contracts/weather.js';
-import { ApiProblem } from '#src/lib/api-problem.js';
-import { useProblemWords } from '#src/lib/problem-words.js';
+import { useWrittenForm } from '#src/lib/written-form.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
 import { CountField, LineField } from '#src/ui/said-fields.js';
@@ -14,30 +13,21 @@ import type { WeatherFormProps } from './weather-board.js';
 /** Rain of a day: measured, in words, or both. */
 export default function RainForm({ communityId, today, onDone }: WeatherFormProps) {
   const { t } = useTranslation('weather');
-  const words = useProblemWords();
   const say = useToast();
   const { addRain } = useWeather(communityId);
-  const [written, setWritten] = useState<RainInput>({ day: today, mm: null, words: '' });
-  const [problems, setProblems] = useState<ReadonlyMap<string, string>>(new Map());
+  const { written, set, at, checked, refuse } = useWrittenForm<RainInput>(rainInput, {
+    ...{ day: today, mm: null, words: '' },
+  });
   const [overall, setOverall] = useState<string | null>(null);
-  const set = (patch: Partial<RainInput>) => {
-    setWritten((before) => ({ ...before, ...patch }));
-  };
   const save = async () => {
-    const parsed = rainInput.safeParse(written);
-    if (!parsed.success) {
-      const { issues } = parsed.error;
-      setProblems(new Map(issues.map(({ path, message }) => [path.join('.'), words.field(message)])));
-      return;
-    }
+    const input = checked();
+    if (input === null) return;
     try {
-      await addRain.mutateAsync(parsed.data);
+      await addRain.mutateAsync(input);
       say(t('form.rainSaved'));
       onDone();
     } catch (cause) {
-      const errors = cause instanceof ApiProblem ? cause.errors : [];
-      setProblems(new Map(errors.map(({ field, code, message }) => [field, words.field(code, message)])));
-      setOverall(errors.length > 0 ? null : words.problem(cause));
+      setOverall(refuse(cause));
     }
   };
   return (
@@ -59,7 +49,7 @@ export default function RainForm({ communityId, today, onDone }: WeatherFormProp
         max={today}
         label={t('form.day')}
         value={written.day}
-        problem={problems.get('day')}
+        problem={at('day')}
         onChange={(event) => {
           set({ day: event.currentTarget.value });
         }}
@@ -67,7 +57,7 @@ export default function RainForm({ communityId, today, onDone }: WeatherFormProp
       <CountField
         label={t('form.mm')}
         value={written.mm}
-        problem={problems.get('mm')}
+        problem={at('mm')}
         onChange={(mm) => {
           set({ mm });
         }}
@@ -76,7 +66,7 @@ export default function RainForm({ communityId, today, onDone }: WeatherFormProp
         label={t('form.rainWords')}
         hint={t('form.rainWordsHint')}
         value={written.words}
-        problem={problems.get('words')}
+        problem={at('words')}
         onChange={(said) => {
           set({ words: said });
         }}
