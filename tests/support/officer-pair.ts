@@ -3,7 +3,12 @@ import { expect } from '@playwright/test';
 import { signIn } from './journey-steps.js';
 
 /** Calls the API with the sign-in of a page. */
-export async function send<T>(page: Page, method: 'GET' | 'POST' | 'PUT', path: string, data?: unknown): Promise<T> {
+export async function send<T>(
+  page: Page,
+  method: 'GET' | 'POST' | 'PUT',
+  path: string,
+  data?: unknown,
+): Promise<T> {
   const session = (await (await page.request.get('/api/session')).json()) as { csrfToken: string };
   const options = { method, headers: { 'X-CSRF-Token': session.csrfToken } };
   const answer = await page.request.fetch(path, data === undefined ? options : { ...options, data });
