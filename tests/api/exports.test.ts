@@ -18,6 +18,8 @@ import {
   type Village,
 } from '#tests/support/calendar-api.js';
 import { addConsent } from '#tests/support/consent-api.js';
+import { addGroup, details } from '#tests/support/sharing-api.js';
+import { addVariant } from '#tests/support/variant-api.js';
 
 /** What leaves the calendar as a file, read by other people's parsers. */
 let api: TestApi;
@@ -49,6 +51,11 @@ beforeAll(async () => {
   const noFeed = await addEntry(officer, calendarId, { titleOfficer: 'Not for telephones' });
   await addConsent(officer, 'entry', noFeed.id, { uses: ['keep', 'show', 'print'] });
   await addEntry(elder, calendarId, { titleOfficer: 'Of the elders', sharingLevel: 'elders' });
+  const group = await addGroup(village.steward, 'Lamp-makers', [elder, staff]);
+  await addEntry(elder, calendarId, {
+    ...{ titleOfficer: 'Of the lamp-makers', sharingLevel: 'group' },
+    sharing: details({ groupId: group.id }),
+  });
   published = await publishDraft(village, calendarId);
   await addEntry(officer, calendarId, { titleOfficer: 'Later in the draft' });
 }, 60_000);
@@ -116,6 +123,44 @@ describe('iCalendar', () => {
     await staff.get(path('draft', 'calendar.ics')).expect(404);
   });
 
+  it('keeps nobody’s time busy, and is stamped with when it was sent, however often it is fetched', async () => {
+    const [first, again] = [
+      await textOf(staff, published.number, 'calendar.ics'),
+      await textOf(staff, published.number, 'calendar.ics'),
+    ];
+    expect(again).toBe(first);
+    for (const { component } of eventsOf(first)) {
+      expect(component.getFirstPropertyValue('transp')).toBe('TRANSPARENT');
+      const stamp = component.getFirstPropertyValue('dtstamp') as ICAL.Time;
+      expect(stamp.toJSDate().toISOString().slice(0, 19)).toBe(published.submittedAt.slice(0, 19));
+    }
+  });
+
+  it('goes by the timing that drives the board, or tells the other one beside it', async () => {
+    const { officer, elder3 } = village;
+    const other = (await beginCalendar(village, 2029)).id;
+    const shown = async (shows: 'entry' | 'variant' | 'both', titleOfficer: string) => {
+      const entry = await addEntry(officer, other, { titleOfficer, hasLastDate: false, lastDate: null });
+      const variant = await addVariant(elder3, other, entry.id, { sharingLevel: 'village' });
+      const variantId = shows === 'variant' ? variant.variantId : null;
+      const content = { ...entry.content, board: { shows, variantId, reason: 'As the elders said' } };
+      await officer
+        .put(`/api/calendars/${other}/entries/${entry.id}`, { content, version: entry.version })
+        .expect(200);
+      return { entry, variant };
+    };
+    const led = await shown('variant', 'Led by the other');
+    const both = await shown('both', 'Both of them');
+    const own = await shown('entry', 'The entry alone');
+    const text = (await officer.get(`/api/calendars/${other}/versions/draft/calendar.ics`).expect(200)).text;
+    const days = ({ entry }: { entry: Entry }) => event(text, entry).startDate.toString();
+    expect(days(led)).toBe(led.variant.dates.window?.bestFrom);
+    expect(days(both)).toBe(both.entry.dates.window?.bestFrom);
+    expect(days(led)).not.toBe(days(both));
+    expect(event(text, both.entry).description).toContain('By another timing: Best days: ');
+    expect(event(text, own.entry).description).not.toContain('By another timing');
+  });
+
   it('reminds nobody unless asked to, and then as many days ahead', async () => {
     expect(await textOf(staff, published.number, 'calendar.ics')).not.toContain('VALARM');
     const asked = event(await textOf(staff, published.number, 'calendar.ics?alarmDays=3'), sow);
@@ -128,7 +173,7 @@ describe('iCalendar', () => {
   it('holds nothing above the village, whoever asks, and nothing that was not agreed for it', async () => {
     for (const client of [village.elder, village.officer, staff]) {
       const text = await textOf(client, published.number, 'calendar.ics');
-      expect(text).not.toMatch(/Of the elders|Not for telephones/u);
+      expect(text).not.toMatch(/Of the elders|Of the lamp-makers|Not for telephones/u);
     }
   });
 });
@@ -207,7 +252,7 @@ describe('JSON', () => {
   it('holds what other files hold, whoever asks, and the draft for those who see it', async () => {
     const text = await textOf(village.elder, 'draft', 'calendar.json');
     expect(text).toContain('Later in the draft');
-    expect(text).not.toMatch(/Of the elders|Not for telephones|salt/u);
+    expect(text).not.toMatch(/Of the elders|Of the lamp-makers|Not for telephones|salt/u);
     await staff.get(path('draft', 'calendar.json')).expect(404);
   });
 });

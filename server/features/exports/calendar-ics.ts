@@ -136,7 +136,7 @@ function linesOf(event: Event, { stamp, sequence, status, alarmDays }: Frame): I
 
 function eventOfEntry(entry: VersionEntryBody, calendarId: string, texts: Texts): Event[] {
   const { content, entryId } = entry;
-  const { window } = boardOf(entry);
+  const { window, beside } = boardOf(entry);
   // What is nothing but a marker stands among the markers.
   if (window === null || isOnlyMarker(content)) return [];
   const { words, files, kinds } = texts;
@@ -157,6 +157,12 @@ function eventOfEntry(entry: VersionEntryBody, calendarId: string, texts: Texts)
           date: window.lastAdvised,
           source: window.lastAdvisedBy === 'fixed' ? (lastDate?.source ?? '') : '',
         }),
+        // Other keepers' timings stand beside it, as on the board; none is averaged.
+        ...beside
+          .filter(({ variantId }) => variantId !== null)
+          .map(({ window: { bestFrom: from, bestTo: to } }) =>
+            files('ics.beside', { days: words.bestFromTo({ from, to }) }),
+          ),
         ...(otherSigns === '' ? [] : [words.lookFor({ signs: otherSigns, needed: null })]),
         ...(ifLate === '' ? [] : [words.ifLate(ifLate)]),
         ...(caution === '' ? [] : [words.takeCare(caution)]),

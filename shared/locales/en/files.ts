@@ -136,6 +136,7 @@ export const texts = {
       recalled: 'recalled',
     },
     early: 'Early days from {{date}}.',
+    beside: 'By another timing: {{days}}',
   },
   calendarCsv: {
     column: {
