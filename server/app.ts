@@ -11,6 +11,7 @@ import { AfterDeathService } from './features/after-death/after-death.service.js
 import { airRoutes } from './features/air/air.routes.js';
 import { AirService } from './features/air/air.service.js';
 import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
+import { ListedMediaService } from './features/attachments/listed-media.service.js';
 import { AttachmentReadingService } from './features/attachments/attachment-reading.service.js';
 import { AttachmentWordsService } from './features/attachments/attachment-words.service.js';
 import { attachmentsRoutes } from './features/attachments/attachments.routes.js';
@@ -295,7 +296,8 @@ export function createApp(options: AppOptions): App {
   const readBack = new ReadBackService(dataSource, contents, clock);
   sheetsRoutes(mount, new SheetsService(contents, versions, weather, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
-  exportsRoutes(router, mount, new ExportsService(contents, clock), feeds);
+  const media = new ListedMediaService(dataSource, clock, options.storage);
+  exportsRoutes(router, mount, new ExportsService(contents, clock, media), feeds);
   importsRoutes(mount, {
     files: new FileImportService(dataSource, clock, options.withdrawals),
     tables: new TableImportService(dataSource, clock, sky),

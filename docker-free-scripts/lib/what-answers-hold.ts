@@ -107,6 +107,8 @@ const ENTRIES: Holds = {
 };
 const BOARD: Holds = { entry: onBoard, 'later entry': both(keptSeen, onBoard) };
 const ONE_CONSENT: Holds = { consent: looked(agreedOn), entry: looked(agreedOn) };
+/** Of voices and pictures a file has a list. */
+const LISTED_FILES: Holds = { recording: onBoard, 'picture title': onBoard };
 const TITLED_FILES: Holds = { recording: sees, 'picture title': sees };
 
 /**
@@ -149,7 +151,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   exportCalendarIcs: BOARD,
   // Whole: other timings stand beside their entries, as far as the board may go by them.
   exportCalendarCsv: { ...BOARD, variant: both(sees, onBoard) },
-  exportCalendarJson: { ...BOARD, variant: both(sees, onBoard) },
+  exportCalendarJson: { ...BOARD, variant: both(sees, onBoard), ...LISTED_FILES },
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.

@@ -1,15 +1,19 @@
 import { z } from 'zod';
+import { ATTACHMENT_KINDS } from './attachments.js';
 import { ENTRIES_MAX } from './calendars.js';
 import { id, instant } from './common.js';
+import { sharingLevel } from './sharing.js';
 import { versionEntryBody, versionHeader, versionState } from './versions.js';
 
 /** What a file says it is, and in which form; a file of another form is refused by its number. */
 export const CALENDAR_FILE_FORMAT = 'dawnpeg-calendar';
-export const CALENDAR_FILE_SCHEMA = 1;
+export const CALENDAR_FILE_SCHEMA = 2;
+/** Without the list of voices and pictures; still read. */
+export const CALENDAR_FILE_FIRST_SCHEMA = 1;
 export const CALENDAR_FILE_MAX_BYTES = 12 * 1024 * 1024;
 
 /** Parts that carry a checksum each: SHA-256 in lower-case hex over the UTF-8 canonical JSON (RFC 8785) of the part. */
-export const CALENDAR_FILE_PARTS = ['source', 'header', 'entries'] as const;
+export const CALENDAR_FILE_PARTS = ['source', 'header', 'entries', 'media'] as const;
 export type CalendarFilePart = (typeof CALENDAR_FILE_PARTS)[number];
 
 const sha256 = z.string().regex(/^[0-9a-f]{64}$/u);
@@ -26,6 +30,27 @@ const calendarFileSource = z.strictObject({
   cautions: z.array(z.string()),
 });
 
+/**
+ * A voice or a picture that belongs to an entry of the file: what it is called, who may know of it, and by which bytes it is
+ * known again. It itself stays where it was given.
+ */
+const calendarFileMedium = z.strictObject({
+  attachmentId: id,
+  entryId: id,
+  kind: z.enum(ATTACHMENT_KINDS),
+  title: z.string(),
+  level: sharingLevel,
+  parts: z.array(
+    z.strictObject({
+      part: z.number().int().min(0),
+      contentType: z.string(),
+      bytes: z.number().int().min(0),
+      sha256,
+    }),
+  ),
+});
+export type CalendarFileMedium = z.infer<typeof calendarFileMedium>;
+
 /** Read before all else: whether it is such a file, and of which form. */
 export const calendarFileKind = z.looseObject({
   format: z.literal(CALENDAR_FILE_FORMAT),
@@ -35,7 +60,7 @@ export const calendarFileKind = z.looseObject({
 /**
  * A whole calendar as a file: a version as it was frozen, or the draft as it stood. It holds what is open or the
  * village's and was agreed to be handed on, with other timings beside their entries; what is kept is not in it, nor are
- * voices, pictures and answers. `entries` are in the order of the calendar, each with its own id, by which what was
+ * answers; of voices and pictures it has a list. `entries` are in the order of the calendar, each with its own id, by which what was
  * taken back since is known.
  */
 export const calendarFile = z.strictObject({
@@ -44,6 +69,14 @@ export const calendarFile = z.strictObject({
   source: calendarFileSource,
   header: versionHeader.omit({ salt: true }),
   entries: z.array(versionEntryBody).max(ENTRIES_MAX),
+  media: z.array(calendarFileMedium),
+  checksums: z.strictObject({ source: sha256, header: sha256, entries: sha256, media: sha256 }),
+});
+/** The same before there was a list of voices and pictures. */
+export const calendarFileFirst = calendarFile.omit({ media: true }).extend({
+  schemaVersion: z.literal(CALENDAR_FILE_FIRST_SCHEMA),
   checksums: z.strictObject({ source: sha256, header: sha256, entries: sha256 }),
 });
 export type CalendarFile = z.infer<typeof calendarFile>;
+/** Of this form or an older one. */
+export type ReadableCalendarFile = CalendarFile | z.infer<typeof calendarFileFirst>;

@@ -9,6 +9,8 @@ export const fileImport = z.strictObject({
   added: z.number().int(),
   /** Taken back since, or kept by their people today, and what hangs on these; how many, and never which. */
   refused: z.number().int(),
+  /** Voices and pictures that the file lists; they stay with the entries to which they were given. */
+  mediaLeft: z.number().int(),
   /** Where the file comes from. */
   from: z.strictObject({ year: z.number().int(), placeName: z.string(), label: z.string().nullable() }),
 });

@@ -18,6 +18,7 @@ import {
   submit,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addPicture } from '#tests/support/attachment-api.js';
 import { addConsent } from '#tests/support/consent-api.js';
 import { details } from '#tests/support/sharing-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
@@ -90,6 +91,38 @@ describe('a file that comes back', () => {
     expect(new Set([...before.entries, ...after.entries].map(({ entryId }) => entryId)).size).toBe(6);
   });
 
+  it('lists voices and pictures with their checksums and levels, and says that they stay behind', async () => {
+    const { elder } = village;
+    const picture = (title: string, sharingLevel: 'village' | 'elders') =>
+      addPicture(elder, sow.id, { subjectType: 'entry', title, sharingLevel });
+    await picture('The first furrow', 'village');
+    await picture('Of the elders', 'elders');
+    const file = await exported(fromId);
+    const [listed] = file.media;
+    expect(file.media).toHaveLength(1);
+    expect(listed).toMatchObject({
+      entryId: sow.id,
+      kind: 'picture',
+      title: 'The first furrow',
+      level: 'village',
+    });
+    const path = `/api/attachments/${listed?.attachmentId ?? ''}/parts/${String(listed?.parts[0]?.part)}`;
+    const bytes = (await elder.get(path).expect(200)).body as Buffer;
+    expect(createHash('sha256').update(bytes).digest('hex')).toBe(listed?.parts[0]?.sha256);
+    expect(await bringIn(file)).toMatchObject({ added: 1, mediaLeft: 1 });
+    expect((await exported(intoId)).media).toEqual([]);
+    await addConsent(village.officer, 'entry', sow.id, { uses: ['keep', 'show', 'print', 'feed'] });
+    expect((await exported(fromId)).media).toEqual([]);
+  });
+
+  it('comes in from the form before there was such a list', async () => {
+    const { media: _none, checksums, ...older } = await exported(fromId);
+    const { media: _sum, ...sums } = checksums;
+    expect(await bringIn({ ...older, schemaVersion: 1, checksums: sums })).toMatchObject({ added: 1 });
+    const touched = { ...older, schemaVersion: 1, checksums: { ...sums, entries: '0'.repeat(64) } };
+    expect(reasonOf(await send(village.officer, touched))).toBe('409 file-changed');
+  });
+
   it('is a draft: nobody has agreed to it, and whoever brought it in has written to it', async () => {
     const published = await publishDraft(village, fromId);
     await bringIn(await exported(fromId, String(published.number)));
@@ -118,7 +151,7 @@ describe('a file that comes back', () => {
 
   it('is tried first without a trace', async () => {
     expect(await bringIn(await exported(fromId), { dryRun: true })).toEqual({
-      ...{ added: 1, refused: 0 },
+      ...{ added: 1, refused: 0, mediaLeft: 0 },
       from: { year: 2027, placeName: 'Upper terraces', label: null },
     });
     expect(await draftOf()).toEqual([]);
@@ -169,9 +202,9 @@ describe('what was taken back or is kept since', () => {
 describe('a file that does not fit', () => {
   it('is told by its form, its checksum, its village or its kind; nothing comes in', async () => {
     const file = await exported(fromId);
-    const newer = await send(village.officer, { ...file, schemaVersion: 2 });
+    const newer = await send(village.officer, { ...file, schemaVersion: 3 });
     expect(reasonOf(newer)).toBe('409 other-file-version');
-    expect((newer.body as Problem).names).toEqual(['2']);
+    expect((newer.body as Problem).names).toEqual(['3']);
     const [first] = file.entries;
     const touched = { ...file, entries: [{ ...first, entryId: randomUUID() }] };
     expect(reasonOf(await send(village.officer, touched))).toBe('409 file-changed');
@@ -203,8 +236,9 @@ describe('a file that does not fit', () => {
 /** With checksums that fit, as somebody would make them who writes a file of their own. */
 function sealed(file: CalendarFile): CalendarFile {
   const sum = (part: unknown) => createHash('sha256').update(canonicalJson(part)).digest('hex');
-  const { source, header, entries } = file;
-  return { ...file, checksums: { source: sum(source), header: sum(header), entries: sum(entries) } };
+  const { source, header, entries, media } = file;
+  const checksums = { source: sum(source), header: sum(header), entries: sum(entries), media: sum(media) };
+  return { ...file, checksums };
 }
 
 /** Ids by the order in which they come, and no stamps. */

@@ -1,8 +1,10 @@
 import {
+  CALENDAR_FILE_FIRST_SCHEMA,
   CALENDAR_FILE_FORMAT,
   CALENDAR_FILE_SCHEMA,
   CALENDAR_FILE_PARTS,
   type CalendarFile,
+  type CalendarFileMedium,
   type CalendarFilePart,
 } from '#shared/contracts/calendar-file.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
@@ -12,7 +14,12 @@ import { translatorFor } from '../../print/translator.js';
 import type { CalendarContent } from '../versions/frozen-content.service.js';
 
 /** A calendar as a file that can be read back without loss. */
-export function calendarFileOf(content: CalendarContent, calendarId: string, exportedAt: Date): CalendarFile {
+export function calendarFileOf(
+  content: CalendarContent,
+  calendarId: string,
+  exportedAt: Date,
+  media: CalendarFileMedium[],
+): CalendarFile {
   const { number, label, state, hash: versionHash, entries } = content;
   const { salt: _hidden, ...header } = content.header;
   const caution = translatorFor(DEFAULT_LANGUAGE, 'files')('caution');
@@ -24,6 +31,7 @@ export function calendarFileOf(content: CalendarContent, calendarId: string, exp
     },
     header,
     entries,
+    media,
   };
   return {
     format: CALENDAR_FILE_FORMAT,
@@ -33,6 +41,7 @@ export function calendarFileOf(content: CalendarContent, calendarId: string, exp
       source: checksumOf(parts.source),
       header: checksumOf(parts.header),
       entries: checksumOf(parts.entries),
+      media: checksumOf(parts.media),
     },
   };
 }
@@ -43,7 +52,8 @@ export function brokenParts(file: Readonly<Record<string, unknown>>): CalendarFi
   const given = new Map<string, unknown>(
     typeof checksums === 'object' && checksums !== null ? Object.entries(checksums) : [],
   );
-  return CALENDAR_FILE_PARTS.filter(
+  const isFirst = file['schemaVersion'] === CALENDAR_FILE_FIRST_SCHEMA;
+  return CALENDAR_FILE_PARTS.filter((part) => part !== 'media' || !isFirst).filter(
     (part) => file[part] === undefined || checksumOf(file[part]) !== given.get(part),
   );
 }

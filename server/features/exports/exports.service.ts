@@ -4,6 +4,7 @@ import { seesDrafts, type Actor } from '../../http/actor.js';
 import type { Clock } from '../../http/context.js';
 import { fileNameOf } from '../../print/file-name.js';
 import { translatorFor } from '../../print/translator.js';
+import type { ListedMediaService } from '../attachments/listed-media.service.js';
 import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
 import { calendarCsv } from './calendar-csv.js';
 import { calendarFileOf } from './calendar-file.service.js';
@@ -19,6 +20,7 @@ export class ExportsService {
   constructor(
     private readonly contents: FrozenContentService,
     private readonly clock: Clock,
+    private readonly media: ListedMediaService,
   ) {}
 
   async ics(actor: Actor, calendarId: string, number: string, query: IcsQuery): Promise<ExportedFile> {
@@ -35,7 +37,9 @@ export class ExportsService {
   /** The whole of it, to be read back. */
   async json(actor: Actor, calendarId: string, number: string): Promise<ExportedFile> {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
-    const file = calendarFileOf(content, calendarId, this.clock.now());
+    const ids = content.entries.map(({ entryId }) => entryId);
+    const media = await this.media.of(actor.communityId, ids);
+    const file = calendarFileOf(content, calendarId, this.clock.now(), media);
     return { content: JSON.stringify(file, null, 1), fileName: nameOf(content, 'json') };
   }
 }

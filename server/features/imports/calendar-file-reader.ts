@@ -1,8 +1,10 @@
 import {
+  CALENDAR_FILE_FIRST_SCHEMA,
   CALENDAR_FILE_SCHEMA,
   calendarFile,
+  calendarFileFirst,
   calendarFileKind,
-  type CalendarFile,
+  type ReadableCalendarFile,
 } from '#shared/contracts/calendar-file.js';
 import { conflict, invalidField } from '../../http/app-error.js';
 import { brokenParts } from '../exports/calendar-file.service.js';
@@ -12,16 +14,16 @@ import { brokenParts } from '../exports/calendar-file.service.js';
  * checksums; its shape last.
  * @throws {AppError} with what is the matter and what to do
  */
-export function readCalendarFile(text: string): CalendarFile {
+export function readCalendarFile(text: string): ReadableCalendarFile {
   const raw = jsonOf(text);
   const kind = calendarFileKind.safeParse(raw);
   if (!kind.success) throw invalidField('file', 'not-a-calendar-file');
   const { schemaVersion } = kind.data;
-  if (schemaVersion !== CALENDAR_FILE_SCHEMA) {
+  if (schemaVersion !== CALENDAR_FILE_SCHEMA && schemaVersion !== CALENDAR_FILE_FIRST_SCHEMA) {
     throw conflict('other-file-version', [String(schemaVersion)]);
   }
   if (isBroken(kind.data)) throw conflict('file-changed');
-  const file = calendarFile.safeParse(raw);
+  const file = (schemaVersion === CALENDAR_FILE_SCHEMA ? calendarFile : calendarFileFirst).safeParse(raw);
   if (!file.success) throw invalidField('file', 'not-a-calendar-file');
   return file.data;
 }

@@ -1,4 +1,4 @@
-import type { CalendarFile } from '#shared/contracts/calendar-file.js';
+import type { ReadableCalendarFile } from '#shared/contracts/calendar-file.js';
 import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
@@ -48,6 +48,8 @@ export class FileImportService {
       placeName: file.header.place.name,
       label: file.source.label,
     };
+    // They stay where they were given: a list is no voice.
+    const mediaLeft = 'media' in file ? file.media.length : 0;
     await this.expectOfVillage(actor, file);
     const listed = new Set((await this.withdrawals.all()).map(({ itemId }) => itemId));
     if (dryRun) {
@@ -55,7 +57,7 @@ export class FileImportService {
       const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
       if (calendar.outNumber !== null) throw new AppError('draft-locked');
       const { entries, refused } = await this.plan(manager, actor, calendar.year, file, listed);
-      return { added: entries.length, refused, from };
+      return { added: entries.length, refused, from, mediaLeft };
     }
     const at = this.clock.now();
     const { added, refused } = await inTransaction(this.dataSource, (manager) =>
@@ -64,10 +66,13 @@ export class FileImportService {
         way: 'file',
       })),
     );
-    return { added, refused, from };
+    return { added, refused, from, mediaLeft };
   }
 
-  private async expectOfVillage({ communityId }: Actor, { source, header }: CalendarFile): Promise<void> {
+  private async expectOfVillage(
+    { communityId }: Actor,
+    { source, header }: ReadableCalendarFile,
+  ): Promise<void> {
     const isOurs =
       source.calendarId === header.calendarId &&
       (await this.dataSource.manager.existsBy(CalendarEntity, { id: source.calendarId, communityId }));
@@ -78,7 +83,7 @@ export class FileImportService {
     manager: EntityManager,
     actor: Actor,
     year: number,
-    file: CalendarFile,
+    file: ReadableCalendarFile,
     listed: ReadonlySet<string>,
   ): Promise<FilePlan> {
     const plan = filePlan(file, await this.today(manager, actor, year, file, listed));
@@ -90,7 +95,7 @@ export class FileImportService {
     manager: EntityManager,
     actor: Actor,
     year: number,
-    { entries }: CalendarFile,
+    { entries }: ReadableCalendarFile,
     listed: ReadonlySet<string>,
   ): Promise<KnownToday> {
     const { communityId } = actor;

@@ -248,6 +248,9 @@ export const texts = {
       '{{count}} thing stays out: it was taken back since, or its people keep it today, or it hangs on one of these.',
     refused_other:
       '{{count}} things stay out: they were taken back since, or their people keep them today, or they hang on one of these.',
+    media_one: 'It lists {{count}} voice or picture, which stays with the entry to which it was given.',
+    media_other:
+      'It lists {{count}} voices and pictures, which stay with the entries to which they were given.',
     levels: 'Each keeps who may see it and what was agreed about it, as they are today.',
   },
   copy: {

@@ -39,6 +39,7 @@ export function FileImportSteps({ calendar, sent, onDone }: FileImportStepsProps
           </p>
           <p className="mt-1">{t('file.adds', { count: found.added })}</p>
           {found.refused > 0 && <p className="mt-1">{t('file.refused', { count: found.refused })}</p>}
+          {found.mediaLeft > 0 && <p className="mt-1">{t('file.media', { count: found.mediaLeft })}</p>}
           <p className="mt-1 text-small">{t('file.levels')}</p>
         </div>
       )}
