@@ -29,7 +29,7 @@ export function OwnSignsSeen({ communityId, home, list }: OwnSignsSeenProps) {
       .flatMap(({ seen }) => seen.map((one) => ({ ownId: id, name, seen: one }))),
   );
   return (
-    <>
+    <div className="ways">
       {sightings.length > 0 && (
         <ul className="grid gap-1 text-small">
           {sightings.map(({ ownId, name, seen }) => (
@@ -51,6 +51,6 @@ export function OwnSignsSeen({ communityId, home, list }: OwnSignsSeenProps) {
         today={today}
         label={t('in.see')}
       />
-    </>
+    </div>
   );
 }

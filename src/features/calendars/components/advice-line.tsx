@@ -32,7 +32,7 @@ export function AdviceLine({ advised, marker, onWay }: AdviceLineProps) {
   return (
     <>
       <p>{say(advised)}</p>
-      <div className="flex flex-wrap gap-x-2">
+      <div className="ways flex flex-wrap">
         {WAYS[advised.advice].map((kind) => (
           <Button
             key={kind}

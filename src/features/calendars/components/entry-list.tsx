@@ -1,4 +1,4 @@
-import { ArrowDownUp, Check, CircleAlert, Plus } from 'lucide-react';
+import { ArrowDownUp, Check, Plus } from 'lucide-react';
 import { useEffect, useRef, useState, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
@@ -97,15 +97,17 @@ function WarnedFilter({ count, isOn, onChange }: WarnedFilterProps) {
   const { t } = useTranslation('calendars');
   return (
     <div className="mb-3">
-      <Button
-        icon={isOn ? <Check aria-hidden size={20} /> : <CircleAlert aria-hidden size={20} />}
+      <button
+        type="button"
+        className="pick"
         aria-pressed={isOn}
         onClick={() => {
           onChange(!isOn);
         }}
       >
-        {t('row.onlyWarned', { count })}
-      </Button>
+        <span className="ring" aria-hidden />
+        <span>{t('row.onlyWarned', { count })}</span>
+      </button>
       <p className="text-small text-umber-soft" role="status">
         {isOn && count === 0 && t('row.noneWarned')}
       </p>

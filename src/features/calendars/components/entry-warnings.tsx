@@ -34,7 +34,7 @@ export function EntryWarnings({ form, entry, all, advice, onWay }: EntryWarnings
         {warnings.map((warning) => (
           <li key={warning}>
             <p>{say(warning)}</p>
-            <div className="flex flex-wrap gap-x-2">
+            <div className="ways flex flex-wrap">
               {waysOut(warning, form.draft, row).map((way) => (
                 <Button
                   key={way.kind === 'otherDay' ? way.phenomenon : way.kind}
