@@ -67,6 +67,10 @@ import { notesRoutes } from './features/notes/notes.routes.js';
 import { NotesService } from './features/notes/notes.service.js';
 import { moonsRoutes } from './features/moons/moons.routes.js';
 import { MoonsService } from './features/moons/moons.service.js';
+import { seasonReviewsRoutes } from './features/season-reviews/season-reviews.routes.js';
+import { SeasonReviewsService } from './features/season-reviews/season-reviews.service.js';
+import { SeasonTasksService } from './features/season-reviews/season-tasks.service.js';
+import { SeasonWordsService } from './features/season-reviews/season-words.service.js';
 import { rolloversRoutes } from './features/rollovers/rollovers.routes.js';
 import { RolloversService } from './features/rollovers/rollovers.service.js';
 import { AnswersService } from './features/reviews/answers.service.js';
@@ -268,6 +272,12 @@ export function createApp(options: AppOptions): App {
   decadesRoutes(mount, new DecadesService(dataSource, contents, sky));
   const whyMoved = new WhyMovedService(sky);
   rolloversRoutes(mount, new RolloversService(dataSource, clock, sky, whyMoved));
+  seasonReviewsRoutes(
+    mount,
+    new SeasonReviewsService(dataSource, clock, contents, weather),
+    new SeasonWordsService(dataSource, clock),
+    new SeasonTasksService(dataSource, clock),
+  );
   notesRoutes(mount, new NotesService(dataSource, clock));
   variantsRoutes(mount, new VariantsService(dataSource, clock, sky));
   versionsRoutes(

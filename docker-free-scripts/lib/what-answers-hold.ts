@@ -22,6 +22,8 @@ export const PLANTED_KINDS = [
     'kept variant',
     'answer',
     'note',
+    'lesson',
+    'decision',
     'figure',
     'story',
     'sign',
@@ -81,6 +83,9 @@ export function isLookedAt({ level, season, consent }: Combination): boolean {
   const isPlain = consent === 'nobody asked' && season === 'none';
   return isPlain || (level === 'village' && (season === 'none' || consent === 'nobody asked'));
 }
+/** Open or the village's, for the whole year: the officer decides about each that is looked at. */
+const decided: Rule = (_person, thing) =>
+  isLookedAt(thing) && (thing.level === 'open' || thing.level === 'village') && thing.season === 'none';
 const looked = (rule: Rule): Rule => both((_person, thing) => isLookedAt(thing), rule);
 
 /** Entries with a sign in their own words, which was seen. */
@@ -137,6 +142,13 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   listVariants: { variant: keptSeen, 'kept variant': keptSeen },
   // The officer who rolled over neither sees nor counts what is kept.
   readRollover: { entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
+  readSeasonReview: {
+    ...{ entry: keptSeen, 'led entry': keptSeen, 'later entry': keptSeen },
+    // The star that leads is named, a figure too.
+    ...{ lesson: keptSeen, decision: keptSeen, figure: both(keptSeen, leading) },
+  },
+  // A task names the entry that it is about.
+  listSeasonTasks: { entry: both(keptSeen, decided), decision: keptSeen },
   readVersion: { ...ENTRIES, figure: leading },
   compareVersions: ENTRIES,
   readLongLook: { entry: sees, 'led entry': sees, 'later entry': keptSeen },
@@ -194,6 +206,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
     ...{ note: bringers, recording: bringers, 'picture title': bringers },
     // Who saw a sign, as the person marked it.
     entry: both(bringers, (_person, thing) => hasOwnSign(thing)),
+    ...{ lesson: bringers, decision: (person) => person === 'officer' },
   },
 };
 

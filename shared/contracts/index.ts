@@ -24,6 +24,7 @@ import { placesEndpoints } from './places.js';
 import { privacyEndpoints } from './privacy.js';
 import { reviewsEndpoints } from './reviews.js';
 import { rolloversEndpoints } from './rollovers.js';
+import { seasonReviewsEndpoints } from './season-reviews.js';
 import { sessionEndpoints } from './session.js';
 import { openPageEndpoints } from './open-page.js';
 import { importsEndpoints } from './imports.js';
@@ -64,6 +65,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   actualDaysEndpoints,
   decadesEndpoints,
   rolloversEndpoints,
+  seasonReviewsEndpoints,
   variantsEndpoints,
   versionsEndpoints,
   reviewsEndpoints,

@@ -13,6 +13,7 @@ export const ON_BEHALF: Readonly<Record<string, OnBehalfRule>> = {
   putSpokenAnswer: 'word',
   addNote: 'word',
   answerNote: 'word',
+  addSeasonLesson: 'word',
   createAttachment: 'word',
   addAttachmentPart: 'word',
   takeBackAnswer: 'pin-shown',

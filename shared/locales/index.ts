@@ -30,6 +30,7 @@ import { texts as reviews } from './en/reviews.js';
 import { texts as rollovers } from './en/rollovers.js';
 import { texts as session } from './en/session.js';
 import { texts as sharing } from './en/sharing.js';
+import { texts as season } from './en/season.js';
 import { texts as sheets } from './en/sheets.js';
 import { texts as signs } from './en/signs.js';
 import { texts as sky } from './en/sky.js';
@@ -76,6 +77,7 @@ export const en = {
   words,
   reviews,
   rollovers,
+  season,
   sharing,
   consents,
   sheets,

@@ -98,12 +98,12 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.calendars,
-    texts: ['calendars', 'sky', 'rollovers'],
+    texts: ['calendars', 'sky', 'rollovers', 'season'],
     load: () => import('./routes/calendars.js'),
   },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
+    texts: ['calendars', 'versions', 'season', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
     load: () => import('./routes/calendar.js'),
   },
   {
@@ -136,6 +136,11 @@ export const villageRoutes: readonly AppRoute[] = [
     path: PATTERNS.rollover,
     texts: ['rollovers', 'calendars', 'sky', 'moves'],
     load: () => import('./routes/rollover.js'),
+  },
+  {
+    path: PATTERNS.seasonReview,
+    texts: ['season', 'calendars', 'anchors', 'sky'],
+    load: () => import('./routes/season-review.js'),
   },
   {
     path: PATTERNS.moves,

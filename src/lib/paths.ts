@@ -46,6 +46,7 @@ export const PATTERNS = {
   meeting: '/calendars/:calendarId/versions/:number/meeting',
   compare: '/calendars/:calendarId/compare',
   rollover: '/calendars/:calendarId/rollover',
+  seasonReview: '/calendars/:calendarId/season-review',
   longLook: '/calendars/:calendarId/long-look',
   moves: '/calendars/:calendarId/moves',
   sheet: '/calendars/:calendarId/sheet',
@@ -142,6 +143,8 @@ export const paths = {
   rollover: (calendarId: string) => `${calendarPath(calendarId)}/rollover`,
   /** What is taken along of a draft and brought into it. */
   moves: (calendarId: string) => `${calendarPath(calendarId)}/moves`,
+  /** The year looked back at. */
+  seasonReview: (calendarId: string) => `${calendarPath(calendarId)}/season-review`,
   /** Ten years of it in one view. */
   longLook: (calendarId: string, query: { from?: number; number?: string } = {}) =>
     withQuery(`${calendarPath(calendarId)}/long-look`, query),

@@ -7,6 +7,8 @@ export interface RolesIn {
   isOfficer: boolean;
   /** Writes entries that their people keep, and reviews all others. */
   isElder: boolean;
+  /** Holds the rule, the people and the settings. */
+  isSteward: boolean;
   /** Officers, elders and stewards see drafts and answers; everybody else what was published. */
   seesDrafts: boolean;
 }
@@ -17,6 +19,9 @@ export function useRolesIn(communityId: string): RolesIn {
   return useMemo(() => {
     const roles = memberships.find((each) => each.communityId === communityId)?.roles ?? [];
     const is = (...any: Role[]) => any.some((role) => roles.includes(role));
-    return { isOfficer: is('officer'), isElder: is('elder'), seesDrafts: is('officer', 'elder', 'steward') };
+    return {
+      ...{ isOfficer: is('officer'), isElder: is('elder'), isSteward: is('steward') },
+      seesDrafts: is('officer', 'elder', 'steward'),
+    };
   }, [memberships, communityId]);
 }

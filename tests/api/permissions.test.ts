@@ -142,6 +142,7 @@ async function furnishOwn(): Promise<Village> {
     ...(await homeOf(village.officer)),
     calendarId: calendar.id,
     rolledId: await rolledFrom(village.officer, calendar.id),
+    taskId: await aTask(village.officer, calendar.id),
     entryId: entry.id,
     ownEntryId: kept.id,
     personId: added.person.id,
@@ -174,6 +175,7 @@ async function furnishOther(): Promise<Village> {
     ...home,
     calendarId: calendar.id,
     rolledId: await rolledFrom(officer, calendar.id),
+    taskId: await aTask(officer, calendar.id),
     entryId: entry.id,
     ownEntryId: entry.id,
     personId: officer.personId,
@@ -196,6 +198,12 @@ async function furnishOther(): Promise<Village> {
 async function rolledFrom(officer: Client, calendarId: string): Promise<string> {
   const answer = await officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
   return (answer.body as { calendarId: string }).calendarId;
+}
+
+async function aTask(officer: Client, calendarId: string): Promise<string> {
+  const body = { entryId: null, kind: 'own-words', text: 'Two at the rain gauge' };
+  const answer = await officer.post(`/api/calendars/${calendarId}/season-review/decisions`, body).expect(201);
+  return (answer.body as { id: string }).id;
 }
 
 async function aSeenSign(officer: Client, marker: Client): Promise<{ signId: string; seenId: string }> {

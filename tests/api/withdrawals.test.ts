@@ -67,6 +67,10 @@ describe('a withdrawn entry', () => {
     await village.officer
       .put(`/api/calendars/${calendarId}/entries/${entry.id}/actual-days`, done)
       .expect(200);
+    const season = `/api/calendars/${calendarId}/season-review`;
+    const about = { entryId: entry.id, text: WORD };
+    await village.elder3.post(`${season}/lessons`, about).expect(201);
+    await village.officer.post(`${season}/decisions`, { ...about, kind: 'later' }).expect(201);
     await addPicture(village.officer, entry.id, { subjectType: 'entry', title: WORD });
     await addVariant(village.elder3, calendarId, entry.id, { giver: WORD, note: WORD, otherSigns: WORD });
     const version = await submit(village.officer, calendarId);
@@ -89,7 +93,8 @@ describe('a withdrawn entry', () => {
     await addConsent(village.officer, 'entry', entry.id, { uses: [...CONSENT_USES] });
     const before = await placesWith(WORD);
     expect(before.length).toBeGreaterThan(8);
-    for (const file of ['calendar.ics', 'calendar.csv', 'calendar.json', 'feed.ics', 'open-page']) {
+    const files = ['calendar.ics', 'calendar.csv', 'calendar.json', 'feed.ics', 'open-page'];
+    for (const file of [...files, 'season-review', 'season-tasks']) {
       expect(before.some((place) => place.includes(file))).toBe(true);
     }
     await withdraw(village.elder, 'entry', entry.id).expect(204);
@@ -191,6 +196,7 @@ describe('a withdrawn entry', () => {
     const askable = {
       only: {
         readRollover: { calendarId: [rolledId] },
+        listSeasonTasks: { calendarId: [rolledId] },
         listEntries: { calendarId: [calendarId, rolledId] },
       },
       params: {

@@ -20,6 +20,8 @@ export interface Village {
   calendarId: string;
   /** A draft that was rolled over and never submitted. */
   rolledId: string;
+  /** A task of that draft. */
+  taskId: string;
   entryId: string;
   /** In review, and kept by everybody who calls here. */
   ownEntryId: string;
@@ -47,6 +49,8 @@ export interface Village {
 
 const OF_ITS_PEOPLE = new Set(['putOwnAnswer', 'takeBackOwnAnswer', 'letOwnDifferenceStand']);
 
+const OF_NEXT_YEAR = new Set(['readRollover', 'listSeasonTasks', 'tickSeasonTask', 'untickSeasonTask']);
+
 export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Record<string, string> {
   const reviewed = new Set([
     'askChanges',
@@ -65,7 +69,10 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
   return {
     communityId: village.community.id,
     placeId: village.place.id,
-    calendarId: endpoint.id === 'readRollover' ? village.rolledId : village.calendarId,
+    calendarId: OF_NEXT_YEAR.has(endpoint.id) ? village.rolledId : village.calendarId,
+    taskId: village.taskId,
+    lessonId: randomUUID(),
+    decisionId: randomUUID(),
     entryId: OF_ITS_PEOPLE.has(endpoint.id) ? village.ownEntryId : village.entryId,
     personId: village.personId,
     figureId: village.figureId,
@@ -182,6 +189,8 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     // An elder writes what is kept; the village's entries are the officer's.
     addEntry: () => entryInput(role === 'elder' ? { sharingLevel: 'elders' } : {}),
     updateEntry: () => ({ content: entryInput(), ...stale }),
+    addSeasonLesson: () => ({ entryId: village.entryId, text: 'Begin at the stream' }),
+    addSeasonDecision: () => ({ entryId: null, kind: 'own-words', text: 'Meet earlier' }),
     putActualDays: () => ({ from: '2027-06-24', to: null, saidBy: 'Elder A-1', plots: '' }),
     importCalendarFile: () => ({ dryRun: true }),
     importTable: () => ({

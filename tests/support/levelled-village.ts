@@ -29,6 +29,7 @@ import {
   type LevelledFigure,
 } from './levelled-things.js';
 import { addRecording } from './attachment-api.js';
+import { lookBack } from './looked-back.js';
 import { addNote } from './notes-api.js';
 import { waitingForOwn } from './sign-api.js';
 import { switchOpenPageOn } from './open-page-api.js';
@@ -146,6 +147,7 @@ export async function furnishLevels(
   for (const { id, ...entry } of looked) {
     await addNote(elder, { subjectId: id, text: plant('note', entry) });
   }
+  await lookBack(village, calendar.id, { all: looked, villages: looked.filter(isVillages) }, plant);
   const forElders = plant('note', plainAt('elders'));
   const note = await addNote(elder, { subjectId: open.id, text: forElders, level: 'elders' });
   const spoken = plant('recording', plainAt('elders'));
@@ -187,6 +189,7 @@ export async function furnishLevels(
     ],
     only: {
       readRollover: { calendarId: [rolledId] },
+      listSeasonTasks: { calendarId: [rolledId] },
       listEntries: { calendarId: [calendar.id, rolledId] },
       printSheet: { number: [numbers[0] ?? '', 'draft'] },
       previewSheet: { number: numbers },

@@ -37,6 +37,8 @@ import { WithdrawalEntity } from './withdrawal.entity.js';
 import { SignEntity } from './sign.entity.js';
 import { OwnSightingEntity } from './own-sighting.entity.js';
 import { SignSightingEntity } from './sign-sighting.entity.js';
+import { SeasonDecisionEntity } from './season-decision.entity.js';
+import { SeasonLessonEntity } from './season-lesson.entity.js';
 import { RainDayEntity } from './rain-day.entity.js';
 import { WeatherNoticeEntity } from './weather-notice.entity.js';
 import { ActualDateEntity } from './actual-date.entity.js';
@@ -91,4 +93,6 @@ export const ENTITIES = [
   RolledItemEntity,
   OpenPageEntity,
   WriteKeyEntity,
+  SeasonLessonEntity,
+  SeasonDecisionEntity,
 ];

@@ -28,6 +28,7 @@ import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 import { WordLists1799300000000 } from './1799300000000-word-lists.js';
 import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
 import { OwnSightings1799300100000 } from './1799300100000-own-sightings.js';
+import { SeasonReviews1799400000000 } from './1799400000000-season-reviews.js';
 
 /** In the order in which they run. */
 export const MIGRATIONS = [
@@ -60,5 +61,6 @@ export const MIGRATIONS = [
   WriteKeys1799200000000,
   WordLists1799300000000,
   OwnSightings1799300100000,
+  SeasonReviews1799400000000,
   OneKindOfKeys1799600000000,
 ];

@@ -61,6 +61,8 @@ export const HELD: Readonly<Record<string, Held>> = {
   meeting: row('review', ['typed_by'], ['id', 'held_on', 'typed_at']),
   note: row('review', ['author_id', 'typed_by'], ['id', 'text', 'written_at', 'closed_at']),
   note_answer: row('review', ['author_id', 'typed_by'], ['id', 'text', 'written_at']),
+  season_lesson: row('review', ['author_id', 'typed_by'], ['id', 'calendar_id', 'text', 'written_at']),
+  season_decision: row('review', ['author_id', 'done_by'], ['id', 'calendar_id', 'kind', 'text', 'done_on']),
   signature: row('review', ['person_id'], 'all'),
   attachment: row('voices', ['added_by', 'typed_by'], ['id', 'kind', 'title', 'speaker', 'added_at']),
   attachment_part: row('voices', [], []),

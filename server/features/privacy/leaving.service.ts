@@ -17,6 +17,7 @@ import { AppError, conflict, invalidField } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
+import { eraseLessonsBy } from '../season-reviews/season-eraser.service.js';
 import { endSessionsOf } from '../session/end-sessions.service.js';
 import { passwordMatches } from '../session/passwords.service.js';
 import type { WithdrawalsService } from '../withdrawals/withdrawals.service.js';
@@ -36,6 +37,7 @@ export class LeavingService {
     await this.expectFree(manager, person);
     if (takeBackGiven) await this.takeBackAll(manager, person);
     await inTransaction(this.dataSource, async (transaction) => {
+      if (takeBackGiven) await eraseLessonsBy(transaction, person.id);
       await this.erase(transaction, person);
     });
   }

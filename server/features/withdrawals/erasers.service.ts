@@ -15,6 +15,7 @@ import { eraseDraftEntry, leadByStarInstead } from '../calendars/entry-eraser.se
 import { eraseConsents } from '../consents/consent-eraser.service.js';
 import { eraseFigureRow, eraseStory } from '../figures/figure-eraser.service.js';
 import { eraseNote, eraseNotesOf } from '../notes/note-eraser.service.js';
+import { eraseSeasonOf } from '../season-reviews/season-eraser.service.js';
 import { eraseSign } from '../signs/sign-eraser.service.js';
 import { forgetRolledDays, sameInOtherYears } from '../rollovers/same-things.service.js';
 import {
@@ -46,6 +47,7 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       const shown = await eraseAttachmentsOf(manager, 'meeting', [...new Set(papers)]);
       const variants = await variantIdsOf(manager, itemId);
       const published = await eraseFrozenEntry(manager, itemId, leavesTrace);
+      await eraseSeasonOf(manager, itemId);
       await eraseDraftEntry(manager, itemId);
       const { withIt = [], ...rest } = attached(together(spoken, shown));
       const beside = variants.map((id) => ({ itemType: 'variant' as const, itemId: id }));

@@ -78,6 +78,7 @@ export const texts = {
 
   list: {
     longLook: 'Ten years at once',
+    lookBack: 'Look back at {{year}}',
     title: 'Calendars',
     under: '{{village}}',
     yearAtPlace: '{{year}}, {{place}}',

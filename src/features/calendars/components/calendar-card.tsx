@@ -84,6 +84,11 @@ export function CalendarCard({ calendar, isOfficer, isElder, seesDrafts, wanted,
             {t('list.print')}
           </Link>
         )}
+        {seesDrafts && (
+          <Link className="link-line" to={paths.seasonReview(id)}>
+            {t('list.lookBack', { year })}
+          </Link>
+        )}
         {next}
       </div>
     </Board>

@@ -22,6 +22,8 @@ import { useFormState } from './use-form-state.js';
 interface EditorPageProps {
   /** The way out of a locked draft: "take it back". It belongs to the versions. */
   lockedAction: (calendar: Calendar, isOfficer: boolean) => ReactNode;
+  /** What the year before decided for this draft: for all of it, or for one entry. */
+  tasks: (calendar: Calendar, entryId: string | null, isOfficer: boolean) => ReactNode;
   /** Who may see the open entry, and what else belongs to it. */
   about: (entry: AboutEntry) => ReactNode;
 }
@@ -38,7 +40,7 @@ export interface AboutEntry {
 }
 
 /** The draft of a calendar: the year's strip, its entries, and the one that is open. */
-export function EditorPage({ lockedAction, about }: EditorPageProps) {
+export function EditorPage({ lockedAction, tasks, about }: EditorPageProps) {
   const { calendarId = '' } = useParams();
   const { data: calendar } = useSuspenseQuery(calendarQuery(calendarId));
   const roles = useRolesIn(calendar.communityId);
@@ -50,6 +52,7 @@ export function EditorPage({ lockedAction, about }: EditorPageProps) {
       calendar={calendar}
       writer={roles}
       lockedAction={lockedAction(calendar, isOfficer)}
+      tasks={(entryId) => tasks(calendar, entryId, isOfficer)}
       about={about}
     />
   );
@@ -59,10 +62,11 @@ interface DraftEditorProps {
   calendar: Calendar;
   writer: Writer;
   lockedAction: ReactNode;
+  tasks: (entryId: string | null) => ReactNode;
   about: EditorPageProps['about'];
 }
 
-function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps) {
+function DraftEditor({ calendar, writer, lockedAction, tasks, about }: DraftEditorProps) {
   const { t } = useTranslation('calendars');
   const editor = useEditor(calendar, writer);
   useWantedMarker(editor);
@@ -79,6 +83,8 @@ function DraftEditor({ calendar, writer, lockedAction, about }: DraftEditorProps
     actions,
     form,
     lockedAction,
+    tasks: tasks(null),
+    entryTasks: asked === null ? null : tasks(asked.entryId),
     about: asked === null ? null : about(asked),
     onSubmit: () => {
       setIsSubmitting(true);

@@ -26,6 +26,9 @@ export interface ViewParts {
   actions: EntryActions;
   form: FormState | null;
   lockedAction: ReactNode;
+  /** What the year before decided, for the draft and for the open entry. */
+  tasks: ReactNode;
+  entryTasks: ReactNode;
   /** What belongs to the open entry besides its words; null while none that is saved is open. */
   about: ReactNode;
   onSubmit: () => void;
@@ -50,6 +53,7 @@ export function WideView(parts: ViewParts) {
         </div>
       </Mast>
       <Notes {...parts} />
+      {parts.tasks}
       <ListState editor={editor}>
         <EditorStrip editor={editor} saving={saving} />
         <div className="editor-columns">
@@ -72,6 +76,7 @@ export function ListView(parts: ViewParts) {
         under={<DraftState editor={editor} />}
       />
       <Notes {...parts} />
+      {parts.tasks}
       <ListState editor={editor}>
         <EntryList editor={editor} actions={actions} />
         <StripFold {...parts} />
@@ -152,6 +157,7 @@ function OpenEntry(parts: ViewParts) {
   if (selected === null) return <p className="text-umber-soft">{t('editor.chooseOne')}</p>;
   return (
     <div className="grid min-w-0 content-start gap-4">
+      {parts.entryTasks}
       <EntryBoard {...parts} selected={selected} />
       {parts.about}
     </div>

@@ -14,7 +14,7 @@ import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
 import type { Way } from '../model/warning-ways.js';
-import { ActualDaysPanel } from './actual-days-panel.js';
+import { ActualDaysPanel } from '#src/lib/actual-days-panel.js';
 import { ChooseLead } from './choose-lead.js';
 import { ElderRequests } from './elder-requests.js';
 import { EntryHeading } from './entry-heading.js';

@@ -2,7 +2,7 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { act, renderHook, waitFor } from '@testing-library/react';
 import type { ReactNode } from 'react';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { useActualDays } from '#src/features/calendars/api/actual-days.js';
+import { useActualDays } from '#src/lib/use-actual-days.js';
 import {
   useAddEntry,
   useDeleteEntry,

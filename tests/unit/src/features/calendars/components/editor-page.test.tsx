@@ -16,7 +16,11 @@ const markers = await tazimelMarkers();
 const { draft, server, communityPath } = draftServer(markers, await starTable(YEAR));
 const open = (search = '', session = OFFICER) =>
   renderOnBoard(
-    <EditorPage about={() => null} lockedAction={() => <button type="button">Take it back</button>} />,
+    <EditorPage
+      about={() => null}
+      tasks={() => null}
+      lockedAction={() => <button type="button">Take it back</button>}
+    />,
     {
       session,
       path: `/calendars/${CALENDAR.id}${search}`,

@@ -38,10 +38,13 @@ it('leaves whoever writes on in their field when a new entry comes to be saved, 
       return post(sent);
     },
   });
-  const { user, address } = await renderOnBoard(<EditorPage about={() => null} lockedAction={() => null} />, {
-    path: `/calendars/${CALENDAR.id}?entry=new-x&marker=hr2491&phenomenon=heliacal-rising`,
-    pattern: '/calendars/:calendarId',
-  });
+  const { user, address } = await renderOnBoard(
+    <EditorPage about={() => null} tasks={() => null} lockedAction={() => null} />,
+    {
+      path: `/calendars/${CALENDAR.id}?entry=new-x&marker=hr2491&phenomenon=heliacal-rising`,
+      pattern: '/calendars/:calendarId',
+    },
+  );
   await user.type(await screen.findByLabelText(/Name of the work or rite/), 'First weeding');
   await user.click(screen.getByRole('button', { name: 'Save the entry' }));
   const crop = screen.getByLabelText<HTMLInputElement>('Crop or variety');

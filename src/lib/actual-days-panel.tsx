@@ -1,19 +1,19 @@
 import { useTranslation } from 'react-i18next';
 import { actualDaysInput, type ActualDaysInput } from '#shared/contracts/actual-days.js';
 import type { Entry } from '#shared/contracts/calendars.js';
-import { useDateWords } from '#src/lib/date-words.js';
-import { useWrittenForm } from '#src/lib/written-form.js';
+import { useDateWords } from './date-words.js';
+import { useWrittenForm } from './written-form.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
 import { More } from '#src/ui/fold.js';
 import { useToast } from '#src/ui/toast.js';
-import { useActualDays } from '../api/actual-days.js';
+import { useActualDays } from './use-actual-days.js';
 import { LineField } from '#src/ui/said-fields.js';
 
 interface ActualDaysPanelProps {
   calendarId: string;
   year: number;
-  entry: Entry;
+  entry: Pick<Entry, 'id' | 'actual'>;
 }
 
 const NOTHING: ActualDaysInput = { from: '', to: null, saidBy: '', plots: '' };

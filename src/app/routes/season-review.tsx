@@ -1,0 +1,1 @@
+export { SeasonReviewPage as Component } from '#src/features/season-reviews/components/season-review-page.js';
