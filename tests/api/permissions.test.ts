@@ -12,7 +12,9 @@ import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
 import { ENDPOINTS } from '#shared/contracts/index.js';
 import { ROLES, type AddedPerson, type Community, type Role } from '#shared/contracts/people.js';
 import type { MadeFeed } from '#shared/contracts/exports.js';
+import type { Entry } from '#shared/contracts/calendars.js';
 import type { Place } from '#shared/contracts/places.js';
+import type { OwnSeen } from '#shared/contracts/signs.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -25,7 +27,7 @@ import {
 import { addConsent, asked } from '#tests/support/consent-api.js';
 import { switchOpenPageOn } from '#tests/support/open-page-api.js';
 import { addPicture } from '#tests/support/attachment-api.js';
-import { addSign, markSeen } from '#tests/support/sign-api.js';
+import { addSign, markSeen, waitingForOwn } from '#tests/support/sign-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { plainPicture } from '#tests/support/media.js';
 import { PERMISSION_GUIDE, withPermissionTable } from '../../docker-free-scripts/lib/permission-table.js';
@@ -121,7 +123,9 @@ async function clientFor({ access }: Endpoint, role: Role | null): Promise<Clien
 async function furnishOwn(): Promise<Village> {
   const village = await openVillage(api);
   const calendar = await beginCalendar(village);
-  const entry = await addEntry(village.officer, calendar.id);
+  const entry = await addEntry(village.officer, calendar.id, {
+    ...{ record: waitingForOwn(), giver: 'Elder A-1', ifLate: 'Sow beans.' },
+  });
   const { variantId } = await addVariant(village.officer, calendar.id, entry.id);
   const published = await publishDraft(village, calendar.id);
   await addEntry(village.officer, calendar.id, { titleOfficer: 'Weed' });
@@ -148,6 +152,8 @@ async function furnishOwn(): Promise<Village> {
     personId: added.person.id,
     figureId,
     ...(await aSeenSign(village.officer, village.elder)),
+    elderSignId: (await addSign(clients.elder, { name: 'Reed caller' })).id,
+    ...(await aSeenOwnSign(village.elder, entry)),
     attachmentId: (await addPicture(village.elder, figureId)).id,
     feedKey: feed.key,
     openKey: await switchOpenPageOn(clients.officer),
@@ -181,6 +187,7 @@ async function furnishOther(): Promise<Village> {
     personId: officer.personId,
     figureId,
     ...(await aSeenSign(officer, officer)),
+    ...{ elderSignId: randomUUID(), ownId: randomUUID(), ownSeenId: randomUUID() },
     attachmentId: (await addPicture(officer, figureId)).id,
     feedKey: '',
     openKey: '',
@@ -209,6 +216,17 @@ async function aTask(officer: Client, calendarId: string): Promise<string> {
 async function aSeenSign(officer: Client, marker: Client): Promise<{ signId: string; seenId: string }> {
   const { id, seen } = await markSeen(marker, await addSign(officer));
   return { signId: id, seenId: seen[0]?.id ?? '' };
+}
+
+async function aSeenOwnSign(
+  marker: Client,
+  { calendarId, id, content }: Entry,
+): Promise<{ ownId: string; ownSeenId: string }> {
+  const ownId = content.record?.signs.list[0]?.ownId ?? '';
+  const path = `/api/calendars/${calendarId}/entries/${id}/signs/${ownId}/seen`;
+  const said = { day: '2026-11-29', who: 'Tirel' };
+  const { seen } = (await marker.post(path, said).expect(201)).body as OwnSeen;
+  return { ownId, ownSeenId: seen[0]?.id ?? '' };
 }
 
 async function aNote(officer: Client, figureId: string): Promise<string> {

@@ -140,7 +140,7 @@ describe('words go along', () => {
       line: index + 2,
       cells: { ...cells, titleOfficer: kind, kind },
     }));
-    const body = { key: randomUUID(), dryRun: false, dayOrder: null, lines: table };
+    const body = { dryRun: false, dayOrder: null, natureSigns: [], lines: table };
     await officer.post(`/api/calendars/${calendar.id}/imports/table`, body).expect(200);
     const kinds = (await entriesOf(officer, calendar.id)).map(({ content }) => [
       ...[content.kind, content.kindWord?.id ?? null, content.kindWord?.word ?? null],

@@ -30,6 +30,11 @@ export interface Village {
   signId: string;
   /** A sighting of somebody who calls nothing here. */
   seenId: string;
+  /** A sign that the calling elder put on the list. */
+  elderSignId: string;
+  /** A sign in the entry's own words, and a day on which it was seen, marked by somebody who calls nothing here. */
+  ownId: string;
+  ownSeenId: string;
   /** A picture of the figure, added by somebody who calls nothing here. */
   attachmentId: string;
   groupId: string;
@@ -50,6 +55,8 @@ export interface Village {
 const OF_ITS_PEOPLE = new Set(['putOwnAnswer', 'takeBackOwnAnswer', 'letOwnDifferenceStand']);
 
 const OF_NEXT_YEAR = new Set(['readRollover', 'listSeasonTasks', 'tickSeasonTask', 'untickSeasonTask']);
+/** What one person took out of the list is not there for the next one. */
+const CHANGES_A_SIGN = new Set(['updateSign', 'removeSign', 'restoreSign']);
 
 export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village): Record<string, string> {
   const reviewed = new Set([
@@ -76,9 +83,9 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
     entryId: OF_ITS_PEOPLE.has(endpoint.id) ? village.ownEntryId : village.entryId,
     personId: village.personId,
     figureId: village.figureId,
-    signId: village.signId,
-    seenId: village.seenId,
-    ownId: randomUUID(),
+    signId: role === 'elder' && CHANGES_A_SIGN.has(endpoint.id) ? village.elderSignId : village.signId,
+    seenId: endpoint.id === 'takeBackOwnSignSeen' ? village.ownSeenId : village.seenId,
+    ownId: village.ownId,
     noticeId: randomUUID(),
     rainId: randomUUID(),
     list: 'kinds',
