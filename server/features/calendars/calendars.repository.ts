@@ -3,8 +3,8 @@ import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { RolloverEntity } from '../../db/entities/rollover.entity.js';
-import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import type { SeenThing } from '../../policy/entry-sight.js';
+import { frozenThings } from '../versions/frozen-things.service.js';
 import { markerKeyOfLead } from './sky-dates.service.js';
 
 /** Entries of the draft in their order, without those that were taken out. */
@@ -85,28 +85,6 @@ export async function rolledFromYears(
     .where('rollover.calendarId IN (:...calendarIds)', { calendarIds })
     .getRawMany<{ calendarId: string; year: number }>();
   return new Map(rows.map(({ calendarId, year }) => [calendarId, year]));
-}
-
-/** Which entries stand in which version, with the star or figure that each goes by. */
-export async function frozenThings(
-  manager: EntityManager,
-  versionIds: readonly string[],
-): Promise<Map<string, SeenThing[]>> {
-  if (versionIds.length === 0) return new Map();
-  const rows = await manager
-    .createQueryBuilder(VersionEntryEntity, 'frozen')
-    .select('frozen.versionId', 'versionId')
-    .addSelect('frozen.entryId', 'entryId')
-    .addSelect("JSON_VALUE(frozen.bodyText, '$.content.lead.markerKey')", 'markerKey')
-    .addSelect("JSON_VALUE(frozen.bodyText, '$.content.lead.spec.markerKey')", 'specKey')
-    .where('frozen.versionId IN (:...versionIds)', { versionIds })
-    .getRawMany<{ versionId: string; entryId: string; markerKey: string | null; specKey: string | null }>();
-  return grouped(
-    rows.map(({ versionId, entryId, markerKey, specKey }) => [
-      versionId,
-      { entryId, markerKey: markerKey ?? specKey },
-    ]),
-  );
 }
 
 function grouped(pairs: readonly (readonly [string, SeenThing])[]): Map<string, SeenThing[]> {

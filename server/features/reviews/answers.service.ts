@@ -23,9 +23,8 @@ import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { personNames } from '../people/person-names.service.js';
 import { frozenContent, frozenEntry, visibleVersion } from '../versions/frozen-content.service.js';
-import { readReviewState, reviewedVersion } from '../versions/review-state.service.js';
+import { answersOf, readReviewState, reviewedVersion } from '../versions/review-state.service.js';
 import { seenOfVersion, thingOf } from '../versions/seen-content.service.js';
-import { answersOf } from '../versions/versions.repository.js';
 import { evidenceOf } from './answer-evidence.js';
 import { handOf } from './answer-hand.js';
 import {

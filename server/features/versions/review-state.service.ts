@@ -1,11 +1,13 @@
 import type { ReviewState } from '#shared/calendar/sign-off.js';
 import type { EntityManager } from 'typeorm';
+import { askedOnce } from '../../db/asked-once.js';
+import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { keptEntryIds } from '../../policy/entry-sight.js';
 import { conflict, notFound } from '../../http/app-error.js';
 import { thingOf } from './seen-content.service.js';
 import { toVersionEntry } from './versions.mapper.js';
-import { answersOf, findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
+import { findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
 
 /**
  * Everything that decides whether a submission is signed off, as it stands in the database now. What is kept by its
@@ -27,6 +29,13 @@ export async function readReviewState(
     signatures: await signaturesOf(manager, version.id),
     writerIds: new Set(version.writerIds),
   };
+}
+
+/** Everybody's words on the calendar's entries, in the order in which they were said. */
+export function answersOf(manager: EntityManager, calendarId: string): Promise<AnswerEntity[]> {
+  return askedOnce(manager, `answers ${calendarId}`, () =>
+    manager.find(AnswerEntity, { where: { calendarId }, order: { answeredAt: 'ASC', id: 'ASC' } }),
+  );
 }
 
 /** The frozen entries with their hashes, and which of them are kept by their people. */

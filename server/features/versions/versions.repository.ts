@@ -1,6 +1,5 @@
 import type { EntityManager } from 'typeorm';
 import { askedOnce } from '../../db/asked-once.js';
-import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { SignatureEntity } from '../../db/entities/signature.entity.js';
@@ -38,13 +37,6 @@ export async function frozenVariants(
 export async function signaturesOf(manager: EntityManager, versionId: string): Promise<SignatureEntity[]> {
   return askedOnce(manager, `signatures ${versionId}`, () =>
     manager.find(SignatureEntity, { where: { versionId }, order: { signedAt: 'ASC', id: 'ASC' } }),
-  );
-}
-
-/** Everybody's words on the calendar's entries, in the order in which they were said. */
-export async function answersOf(manager: EntityManager, calendarId: string): Promise<AnswerEntity[]> {
-  return askedOnce(manager, `answers ${calendarId}`, () =>
-    manager.find(AnswerEntity, { where: { calendarId }, order: { answeredAt: 'ASC', id: 'ASC' } }),
   );
 }
 
