@@ -91,9 +91,11 @@ function Year({ review, writing }: { review: SeasonReview; writing: Writing }) {
             <Notices review={review} />
             <Board title={t('entries')}>
               {entries.length === 0 && <p>{t('nothing')}</p>}
-              {entries.map((entry) => (
-                <EntryReview key={entry.entryId} review={review} entry={entry} writing={writing} />
-              ))}
+              <div className="season-folds">
+                {entries.map((entry) => (
+                  <EntryReview key={entry.entryId} review={review} entry={entry} writing={writing} />
+                ))}
+              </div>
             </Board>
           </div>
         </div>

@@ -27,17 +27,19 @@ export function DraftTasks({ calendarId, isOfficer }: SeasonTasksProps) {
   const { fromYear: year, fromCalendarId } = first;
   const open = tasks.filter(({ done }) => done === null).length;
   return (
-    <Fold
-      title={t('tasks.title', { year })}
-      line={open === 0 ? t('tasks.allDone') : t('tasks.open', { count: open })}
-    >
-      <Tasks calendarId={calendarId} isOfficer={isOfficer} tasks={tasks} />
-      <p className="mt-3">
-        <Link className="link-line" to={paths.seasonReview(fromCalendarId)}>
-          {t('tasks.openReview', { year })}
-        </Link>
-      </p>
-    </Fold>
+    <div className="season-folds">
+      <Fold
+        title={t('tasks.title', { year })}
+        line={open === 0 ? t('tasks.allDone') : t('tasks.open', { count: open })}
+      >
+        <Tasks calendarId={calendarId} isOfficer={isOfficer} tasks={tasks} />
+        <p className="mt-3">
+          <Link className="link-line" to={paths.seasonReview(fromCalendarId)}>
+            {t('tasks.openReview', { year })}
+          </Link>
+        </p>
+      </Fold>
+    </div>
   );
 }
 
