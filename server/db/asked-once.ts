@@ -4,6 +4,9 @@ import type { EntityManager } from 'typeorm';
 /** Answers of the database by question, for as long as one call that only reads is being answered. */
 const asked = new AsyncLocalStorage<Map<string, Promise<unknown>>>();
 
+/** Whoever asks, as far as it counts here: in a transaction or not. */
+type Asker = Pick<EntityManager, 'queryRunner'>;
+
 /** Within `read` nothing changes: the same question to the database is asked once, whoever in the product asks it. */
 export function askingOnce<T>(read: () => T): T {
   return asked.run(new Map(), read);
@@ -13,7 +16,7 @@ export function askingOnce<T>(read: () => T): T {
  * The answer to a question that has a name of its own. Outside of a call that only reads, and in a transaction, it is
  * asked each time. Whoever gets an answer leaves it as it is: others get the same one.
  */
-export function askedOnce<T>(manager: EntityManager, question: string, ask: () => Promise<T>): Promise<T> {
+export function askedOnce<T>(manager: Asker, question: string, ask: () => Promise<T>): Promise<T> {
   const known = knownTo(manager);
   if (known === undefined) return ask();
   // Under one name there is one kind of answer.
@@ -26,7 +29,7 @@ export function askedOnce<T>(manager: EntityManager, question: string, ask: () =
 
 /** The same for things by id: only those are asked for that nobody has asked for yet. Ids without a thing are missing. */
 export async function askedOnceEach<T>(
-  manager: EntityManager,
+  manager: Asker,
   question: string,
   ids: readonly string[],
   ask: (ids: readonly string[]) => Promise<ReadonlyMap<string, T>>,
@@ -45,6 +48,6 @@ export async function askedOnceEach<T>(
   return found;
 }
 
-function knownTo(manager: EntityManager): Map<string, Promise<unknown>> | undefined {
+function knownTo(manager: Asker): Map<string, Promise<unknown>> | undefined {
   return manager.queryRunner === undefined ? asked.getStore() : undefined;
 }

@@ -1,9 +1,9 @@
-import type { EntityManager } from 'typeorm';
+import type { QueryRunner } from 'typeorm';
 import { describe, expect, it, vi } from 'vitest';
 import { askedOnce, askedOnceEach, askingOnce } from '#server/db/asked-once.js';
 
-const plain = {} as EntityManager;
-const inTransaction = { queryRunner: {} } as EntityManager;
+const plain = {};
+const inTransaction = { queryRunner: {} as QueryRunner };
 
 describe('a call that only reads', () => {
   it('asks the same question once, and another one by itself', async () => {
