@@ -5,6 +5,7 @@
 export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/contracts/consents.ts': 'tests/api/consents.test.ts',
   'shared/contracts/sharing.ts': 'tests/api/sharing.test.ts',
+  'shared/contracts/word-lists.ts': 'tests/api/word-lists.test.ts',
   'shared/calendar/day-grounds.ts': 'tests/unit/shared/calendar/why-moved.test.ts',
   'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',
@@ -13,6 +14,7 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/sheet/month-words.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/page-foot.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
   'shared/sheet/strokes.ts': 'tests/unit/shared/sheet/page-paths.test.ts',
+  'shared/sheet/tick-circles.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
   'shared/sheet/tile-frame.ts': 'tests/unit/shared/sheet/year-board.test.ts',
   'shared/sheet/units.ts': 'tests/unit/shared/sheet/page-paths.test.ts',
   'shared/sheet/version-figure.ts': 'tests/unit/shared/sheet/layout-sheet.test.ts',
