@@ -1,5 +1,5 @@
 import { ChevronDown } from 'lucide-react';
-import type { ReactNode, ToggleEvent } from 'react';
+import { useState, type ReactNode, type ToggleEvent } from 'react';
 
 export interface FoldProps {
   title: ReactNode;
@@ -30,15 +30,29 @@ export function Fold({ title, line, open, onToggle, children }: FoldProps) {
   );
 }
 
+interface MoreProps {
+  label: ReactNode;
+  icon?: ReactNode;
+  /** Drawn only once it is opened: for what takes long to draw. */
+  lazy?: boolean;
+  children: ReactNode;
+}
+
 /** Underlined words that open something: a table behind a picture, an explanation. */
-export function More({ label, icon, children }: { label: ReactNode; icon?: ReactNode; children: ReactNode }) {
+export function More({ label, icon, lazy = false, children }: MoreProps) {
+  const [wasOpened, setWasOpened] = useState(!lazy);
   return (
-    <details className="more">
+    <details
+      className="more"
+      onToggle={(event: ToggleEvent<HTMLDetailsElement>) => {
+        if (event.currentTarget.open) setWasOpened(true);
+      }}
+    >
       <summary>
         {icon}
         {label}
       </summary>
-      {children}
+      {wasOpened && children}
     </details>
   );
 }

@@ -165,6 +165,11 @@ export const texts = {
     stripTrouble: 'The stars’ lanes could not be brought up. Days are shown as they were saved.',
     loadingStars: 'The stars are on their way.',
     lastSaved: 'Saved by {{name}}, {{when}}.',
+    search: 'Look for an entry by name or crop',
+    found_one: '{{count}} of {{total}} entries',
+    found_other: '{{count}} of {{total}} entries',
+    before_one: 'Show {{count}} before it',
+    before_other: 'Show more of the {{count}} before it',
   },
 
   row: {

@@ -1,4 +1,4 @@
-import { useRef, useState, type PointerEvent } from 'react';
+import { startTransition, useRef, useState, type PointerEvent } from 'react';
 import { daysDragged, partAt, type MovePart } from './day-drag.js';
 
 /** A bar that is held, by its key, and how far it was dragged. */
@@ -55,10 +55,13 @@ export function useDayDrag({ pxPerDay, mayMove, onMove, onTap }: DayDragWays) {
       },
       onPointerUp: () => {
         const now = held.current;
-        letGo();
-        if (now === null) return;
-        if (now.days !== 0) onMove(now.key, now.part, now.days);
-        else onTap(now.key);
+        held.current = null;
+        // Its shadow stays until the bar itself stands there.
+        startTransition(() => {
+          setDrag(null);
+          if (now !== null && now.days !== 0) onMove(now.key, now.part, now.days);
+        });
+        if (now?.days === 0) onTap(now.key);
       },
       // A finger that goes on to scroll the page drags nothing.
       onPointerCancel: letGo,

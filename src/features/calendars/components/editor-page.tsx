@@ -1,5 +1,5 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { useState, type ReactNode } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useParams } from 'react-router-dom';
 import type { Calendar, EntryInput } from '#shared/contracts/calendars.js';
@@ -8,6 +8,7 @@ import { EntryTitles } from '#src/lib/entry-titles.js';
 import { usePageTitle } from '#src/lib/page-title.js';
 import type { SharingValue } from '#src/lib/sharing-fields.js';
 import { useRolesIn } from '#src/lib/roles-in.js';
+import type { ShownEntry } from '../model/preview-dates.js';
 import { useDraftChanges } from '../model/use-draft-changes.js';
 import { useEditor, type Writer } from '../model/use-editor.js';
 import { useEntryActions } from '../model/use-entry-actions.js';
@@ -92,7 +93,7 @@ function DraftEditor({ calendar, writer, lockedAction, tasks, about }: DraftEdit
   };
   const { selection, selected } = editor;
   const isEntryView = !selection.isWide && selected !== null;
-  const titles = new Map(editor.shown.map(({ id, content }) => [id, content.titleOfficer]));
+  const titles = useTitles(editor.shown);
   return (
     <EntryTitles titles={titles}>
       {selection.isWide ? (
@@ -111,4 +112,10 @@ function DraftEditor({ calendar, writer, lockedAction, tasks, about }: DraftEdit
       />
     </EntryTitles>
   );
+}
+
+/** The same map until a title changes. */
+function useTitles(shown: readonly ShownEntry[]): ReadonlyMap<string, string> {
+  const pairs = JSON.stringify(shown.map(({ id, content }) => [id, content.titleOfficer]));
+  return useMemo(() => new Map(JSON.parse(pairs) as [string, string][]), [pairs]);
 }

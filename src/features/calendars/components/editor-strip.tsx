@@ -110,7 +110,7 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
             <WindowKey kinds={['best', 'margin', 'watch', 'fixed']} />
           </div>
         </More>
-        <More label={t('strip.asTable')}>
+        <More lazy label={t('strip.asTable')}>
           <StripTable entries={shown} year={year} markers={byKey ?? NO_NAMES} ways={canWrite ? ways : null} />
         </More>
         <More label={t('strip:tools')}>

@@ -1,10 +1,13 @@
 import { ArrowDownUp, Check, Plus } from 'lucide-react';
-import { useEffect, useRef, useState, type RefObject } from 'react';
+import { useEffect, useMemo, useRef, useState, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { KeptLine } from '#src/lib/kept-line.js';
+import { MoreOfThem } from '#src/lib/shown-part.js';
 import { Button } from '#src/ui/button.js';
+import { TextField } from '#src/ui/field.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
+import { FIRST_PART, foundBy, LIST_PART, partWith } from '../model/list-part.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
 import { thingsToLookAt } from '../model/advice-of-all.js';
@@ -27,13 +30,55 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
     ? shown.filter((entry) => warningsOf(entry) > 0 || entry.id === selected?.id)
     : shown;
   const { isWide } = selection;
-  const span = yearSpan(calendar.year);
+  const span = useMemo(() => yearSpan(calendar.year), [calendar.year]);
   const list = useOpenRowInSight(selected?.id ?? null);
-  const months = dates.months(calendar.year);
+  const months = useMemo(() => dates.months(calendar.year), [dates, calendar.year]);
+  const monthStarts = useMemo(() => months.slice(1).map(({ dayNumber }) => dayNumber), [months]);
+  const [wanted, setWanted] = useState('');
+  const found = foundBy(listed, wanted);
+  const [drawn, setDrawn] = useState(FIRST_PART);
+  const part = partWith(
+    drawn,
+    found.findIndex(({ id }) => id === selected?.id),
+  );
+  const left = found.length - part.to;
   return (
     <section aria-label={t('editor.list')}>
       {!isOrdering && (warned.length > 0 || isOnlyWarned) && (
-        <WarnedFilter count={warned.length} isOn={isOnlyWarned} onChange={setIsOnlyWarned} />
+        <WarnedFilter
+          count={warned.length}
+          isOn={isOnlyWarned}
+          onChange={(isOn) => {
+            setIsOnlyWarned(isOn);
+            setDrawn(FIRST_PART);
+          }}
+        />
+      )}
+      {!isOrdering && shown.length > LIST_PART && (
+        <div className="mb-3">
+          <TextField
+            type="search"
+            label={t('editor.search')}
+            value={wanted}
+            onChange={(event) => {
+              setWanted(event.target.value);
+              setDrawn(FIRST_PART);
+            }}
+          />
+          <p className="text-small text-umber-soft" role="status">
+            {wanted.trim() !== '' && t('editor.found', { count: found.length, total: listed.length })}
+          </p>
+        </div>
+      )}
+      {!isOrdering && part.from > 0 && (
+        <Button
+          className="mb-3"
+          onClick={() => {
+            setDrawn({ from: Math.max(0, part.from - LIST_PART), to: part.to });
+          }}
+        >
+          {t('editor.before', { count: part.from })}
+        </Button>
       )}
       {!isWide && !isOrdering && (
         <div className="entry-scale">
@@ -43,8 +88,8 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
       {isOrdering ? (
         <OrderList editor={editor} actions={actions} />
       ) : (
-        <ol ref={list} className="entry-list">
-          {listed.map((entry) => (
+        <ol ref={list} className="entry-list" start={part.from + 1}>
+          {found.slice(part.from, part.to).map((entry) => (
             <li key={entry.id}>
               <EntryRow
                 entry={entry}
@@ -55,11 +100,19 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
                 answers={answers.get(entry.id)}
                 warnings={warningsOf(entry)}
                 span={span}
-                monthStarts={months.slice(1).map(({ dayNumber }) => dayNumber)}
+                monthStarts={monthStarts}
               />
             </li>
           ))}
         </ol>
+      )}
+      {!isOrdering && left > 0 && (
+        <MoreOfThem
+          left={left}
+          more={() => {
+            setDrawn({ from: part.from, to: part.to + LIST_PART });
+          }}
+        />
       )}
       <KeptLine keptCount={editor.keptCount} />
       {canWrite && (

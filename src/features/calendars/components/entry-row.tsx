@@ -1,6 +1,6 @@
 import { CircleAlert, PencilLine } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import type { ReactNode } from 'react';
+import { memo, type ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
 import { KeptChip } from '#src/lib/level-chip.js';
@@ -26,7 +26,7 @@ export interface EntryRowProps {
 }
 
 /** One entry of the list. On a phone it carries its own line of the year. */
-export function EntryRow(props: EntryRowProps) {
+export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
   const { entry, calendarId, year, isOpen, isWide, span, monthStarts } = props;
   const { t } = useTranslation('calendars');
   const words = useEntryWords();
@@ -62,7 +62,7 @@ export function EntryRow(props: EntryRowProps) {
       )}
     </Link>
   );
-}
+});
 
 /** What is to be seen about an entry before it is opened: a sign and words each. */
 function RowMarks({ entry, answers, warnings }: EntryRowProps) {

@@ -2,6 +2,7 @@ import { useEffect, useMemo, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, type NamesByKey } from '#src/lib/entry-words.js';
+import { MoreOfThem, useShownPart } from '#src/lib/shown-part.js';
 import { Table } from '#src/ui/table.js';
 import { OFFSETS } from '../model/offsets.js';
 import type { ShownEntry } from '../model/preview-dates.js';
@@ -24,6 +25,7 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
   const dates = useDateWords();
   const words = useEntryWords();
   const steady = useSteady(ways);
+  const part = useShownPart(entries);
   const days = ({ dates: found }: ShownEntry) =>
     found?.window ? (
       DAYS.map((day) => <td key={day}>{found.window && dates.day(found.window[day], 'short')}</td>)
@@ -31,46 +33,49 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
       <td colSpan={DAYS.length}>{t('days.none', { year })}</td>
     );
   return (
-    <Table caption={t('strip.tableCaption', { year })} middle>
-      <thead>
-        <tr>
-          <th scope="col">{t('strip.column.entry')}</th>
-          {ways &&
-            [...OFFSETS, 'save' as const].map((column) => (
+    <>
+      <Table caption={t('strip.tableCaption', { year })} middle>
+        <thead>
+          <tr>
+            <th scope="col">{t('strip.column.entry')}</th>
+            {ways &&
+              [...OFFSETS, 'save' as const].map((column) => (
+                <th key={column} scope="col">
+                  {t(`strip:column.${column}`)}
+                </th>
+              ))}
+            {COLUMNS.slice(1).map((column) => (
               <th key={column} scope="col">
-                {t(`strip:column.${column}`)}
+                {t(`strip.column.${column}`)}
               </th>
             ))}
-          {COLUMNS.slice(1).map((column) => (
-            <th key={column} scope="col">
-              {t(`strip.column.${column}`)}
-            </th>
-          ))}
-        </tr>
-      </thead>
-      <tbody>
-        {entries.map((entry) => (
-          <tr key={entry.id}>
-            {ways?.mayWrite(entry) === true ? (
-              <StripRowFields
-                entryId={entry.id}
-                title={entry.content.titleOfficer}
-                offsets={entry.content.offsets}
-                unsaved={entry.unsaved}
-                ways={steady}
-              />
-            ) : (
-              <>
-                <th scope="row">{entry.content.titleOfficer || t('editor.untitled')}</th>
-                {ways && <td colSpan={OFFSETS.length + 1} />}
-              </>
-            )}
-            <td>{words.leadAlone(entry.content, markers)}</td>
-            {days(entry)}
           </tr>
-        ))}
-      </tbody>
-    </Table>
+        </thead>
+        <tbody>
+          {part.shown.map((entry) => (
+            <tr key={entry.id}>
+              {ways?.mayWrite(entry) === true ? (
+                <StripRowFields
+                  entryId={entry.id}
+                  title={entry.content.titleOfficer}
+                  offsets={entry.content.offsets}
+                  unsaved={entry.unsaved}
+                  ways={steady}
+                />
+              ) : (
+                <>
+                  <th scope="row">{entry.content.titleOfficer || t('editor.untitled')}</th>
+                  {ways && <td colSpan={OFFSETS.length + 1} />}
+                </>
+              )}
+              <td>{words.leadAlone(entry.content, markers)}</td>
+              {days(entry)}
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+      <MoreOfThem {...part} />
+    </>
   );
 }
 

@@ -59,15 +59,30 @@ export interface ShownEntry {
   unsaved: boolean;
 }
 
+/** What follows from a thing, made once for as long as the thing is the same. */
+export function remembered<K extends object, V>(made: WeakMap<K, V>, from: K, make: () => V): V {
+  const before = made.get(from);
+  if (before !== undefined) return before;
+  const value = make();
+  made.set(from, value);
+  return value;
+}
+
+const withTheOther = new WeakMap<ShownEntry, ShownEntry>();
+
 /** Adds the warning that two entries share, as the server does: it needs all of them at hand. */
 export function withOverlaps(entries: readonly ShownEntry[]): ShownEntry[] {
   const colliding = overlappingEntryIds(
     entries.map(({ id, content, dates }) => ({ id, timing: content, window: dates?.window ?? null })),
   );
   return entries.map((entry) => {
-    if (entry.dates === null) return entry;
-    const own = entry.dates.warnings.filter((warning) => warning !== 'windows-overlap');
-    const warnings = colliding.has(entry.id) ? inOrder(new Set([...own, 'windows-overlap' as const])) : own;
-    return { ...entry, dates: { ...entry.dates, warnings } };
+    const { dates } = entry;
+    if (dates === null || dates.warnings.includes('windows-overlap') === colliding.has(entry.id))
+      return entry;
+    return remembered(withTheOther, entry, () => {
+      const own = dates.warnings.filter((warning) => warning !== 'windows-overlap');
+      const warnings = colliding.has(entry.id) ? inOrder(new Set([...own, 'windows-overlap' as const])) : own;
+      return { ...entry, dates: { ...dates, warnings } };
+    });
   });
 }

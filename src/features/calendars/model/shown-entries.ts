@@ -4,7 +4,7 @@ import { sameJson } from '#shared/kernel/canonical-json.js';
 import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
 import { isNewId, type Edits, type EntryEdit } from './kept-edits.js';
 import { withAnchors } from './hung-entries.js';
-import { previewDates, withOverlaps, type Markers, type ShownEntry } from './preview-dates.js';
+import { previewDates, remembered, withOverlaps, type Markers, type ShownEntry } from './preview-dates.js';
 import { signOf, type Signs } from './signs.js';
 
 interface Sources {
@@ -18,6 +18,10 @@ interface Sources {
   signs: Signs;
 }
 
+/** Entries look the same until something about them changes: whoever draws hundreds of them draws only those anew. */
+const asSaved = new WeakMap<Entry, ShownEntry>();
+const asWritten = new WeakMap<EntryEdit, { from: readonly unknown[]; shown: ShownEntry }>();
+
 /** The entries as they look now: what is saved, with everything over it that is written and not saved. */
 export function shownEntries({
   saved,
@@ -30,10 +34,9 @@ export function shownEntries({
 }: Sources): ShownEntry[] {
   const shown = saved.map((entry): ShownEntry => {
     const edit = edits.get(entry.id);
-    if (!edit)
-      return { id: entry.id, saved: entry, content: entry.content, dates: entry.dates, unsaved: false };
-    const content = contentOf(edit.draft);
-    return { id: entry.id, saved: entry, content, dates: datesOf(content, entry), unsaved: true };
+    if (edit) return written(edit, entry);
+    const { id, content, dates } = entry;
+    return remembered(asSaved, entry, () => ({ id, saved: entry, content, dates, unsaved: false }));
   });
   const newIds = [...edits.keys()].filter(isNewId);
   if (openId !== null && isNewId(openId) && !newIds.includes(openId)) newIds.push(openId);
@@ -42,6 +45,16 @@ export function shownEntries({
     return { id, saved: null, content, dates: datesOf(content, null), unsaved: edits.has(id) };
   });
   return withOverlaps(withAnchors([...shown, ...added], year));
+
+  function written(edit: EntryEdit, entry: Entry): ShownEntry {
+    const from = [entry, year, markers, signs];
+    const before = asWritten.get(edit);
+    if (before?.from.every((each, index) => each === from[index]) === true) return before.shown;
+    const content = contentOf(edit.draft);
+    const shown = { id: entry.id, saved: entry, content, dates: datesOf(content, entry), unsaved: true };
+    asWritten.set(edit, { from, shown });
+    return shown;
+  }
 
   /** While the sky is on its way, an entry that still goes by the same thing keeps its saved sign. */
   function datesOf(content: EntryInput, entry: Entry | null) {

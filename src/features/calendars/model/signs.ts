@@ -40,7 +40,11 @@ export function specsOf(contents: readonly Pick<EntryInput, 'lead'>[]): SkyMarke
 export function useSigns(placeId: string, year: number, specs: readonly SkyMarkerSpec[]): Signs {
   return useQueries({
     queries: specs.map((spec) => skyMarkerQuery(placeId, year, spec)),
-    combine: (results) =>
-      new Map(results.flatMap(({ data }) => (data ? [[canonicalJson(data.spec), data] as const] : []))),
+    combine: bySpec,
   });
+}
+
+/** One function for all times: a new one at every drawing would make a new map each time. */
+function bySpec(results: readonly { data: SkyMarkerYear | undefined }[]): Signs {
+  return new Map(results.flatMap(({ data }) => (data ? [[canonicalJson(data.spec), data] as const] : [])));
 }

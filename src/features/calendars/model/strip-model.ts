@@ -23,18 +23,20 @@ export function lanesOf(entries: readonly ShownEntry[], markers: Markers | null)
   return [...rows.values()];
 }
 
+const madeBars = new WeakMap<ShownEntry, BoardBar>();
+
+/** The same bar for as long as its entry looks the same. */
 export function barsOf(entries: readonly ShownEntry[], nameOf: (entry: ShownEntry) => string): BoardBar[] {
   return entries.flatMap((entry) => {
     const window = entry.dates?.window;
     if (!window) return [];
-    return [
-      {
-        key: entry.id,
-        name: nameOf(entry),
-        days: windowDayNumbers(window),
-        kind: entry.content.protectiveWatch ? ('watch' as const) : ('work' as const),
-      },
-    ];
+    const name = nameOf(entry);
+    const before = madeBars.get(entry);
+    if (before?.name === name) return [before];
+    const kind = entry.content.protectiveWatch ? 'watch' : 'work';
+    const bar: BoardBar = { key: entry.id, name, days: windowDayNumbers(window), kind };
+    madeBars.set(entry, bar);
+    return [bar];
   });
 }
 

@@ -80,7 +80,8 @@ export function useEntryEdits(calendarId: string): EntryEdits {
       pending.current.set(entryId, edit);
       clearTimeout(timer.current);
       timer.current = setTimeout(() => {
-        setUnkept(flush());
+        const lost = flush();
+        setUnkept((before) => (before.size === 0 && lost.size === 0 ? before : lost));
       }, PAUSE_MS);
     },
     [set, flush],

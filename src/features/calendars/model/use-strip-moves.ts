@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { startTransition, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
@@ -38,9 +38,12 @@ export function useStripMoves(editor: Editor, onZoom: (step: 1 | -1) => void): B
       onMove: (key, part, days) => {
         const entry = byId.get(key);
         if (!entry || !mayMove(key)) return;
-        changeEntry(editor, entry, ({ offsets }) => ({ offsets: movedOffsets(offsets, part, days) }));
+        // Drawn piece by piece: with hundreds of entries the hand goes on before all of it is drawn.
+        startTransition(() => {
+          changeEntry(editor, entry, ({ offsets }) => ({ offsets: movedOffsets(offsets, part, days) }));
+        });
         // On a wide screen the form beside follows; on a phone it would cover the strip.
-        if (editor.selection.isWide) editor.selection.open(key);
+        if (editor.selection.isWide && editor.selection.openId !== key) editor.selection.open(key);
       },
       preview: (key, part, days) => {
         const [window, entry] = [windowOf(key), byId.get(key)];
