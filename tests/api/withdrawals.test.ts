@@ -24,6 +24,7 @@ import {
   type Village,
 } from '#tests/support/calendar-api.js';
 import { addConsent } from '#tests/support/consent-api.js';
+import { askableAbout } from '#tests/support/askable-about.js';
 import { pathsOf, READING, textOf } from '#tests/support/every-endpoint.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { copyTables, filesWith, putBack, tablesWith } from '#tests/support/search-everything.js';
@@ -193,44 +194,7 @@ describe('a withdrawn entry', () => {
     const rolled = await village.officer.post(`/api/calendars/${calendarId}/next-year`).expect(200);
     const found = [...(await tablesWith(api, word)), ...filesWith(api, word)];
     const rolledId = (rolled.body as { calendarId: string }).calendarId;
-    const askable = {
-      only: {
-        readRollover: { calendarId: [rolledId] },
-        listSeasonTasks: { calendarId: [rolledId] },
-        listEntries: { calendarId: [calendarId, rolledId] },
-      },
-      params: {
-        communityId: [village.officer.communityId],
-        placeId: [village.placeId],
-        calendarId: [calendarId],
-        entryId: [entry.id],
-        number: ['1', 'draft'],
-        figureId: [entry.id],
-        markerKey: ['pleiades'],
-        itemType: ['entry'],
-        itemId: [entry.id],
-        groupId: [entry.id],
-        personId: [village.elder.personId],
-        deviceId: ['0'.repeat(64)],
-        attachmentId: [entry.id],
-        part: ['1'],
-        withdrawalId: [entry.id],
-        consentId: [entry.id],
-        noteId: [entry.id],
-        cardId: [entry.id],
-        variantId: [entry.id],
-      },
-      queries: {
-        compareVersions: ['?from=1&to=draft'],
-        readLongLook: ['?from=2027&years=1&number=1', '?from=2027&years=1&number=draft'],
-        readFeed: [`?key=${feedKey}`],
-        readOpenPage: [`?key=${openKey}`],
-        listAttachments: [`?subjectType=entry&subjectId=${entry.id}`],
-        listAuditEvents: ['?limit=200'],
-        printSheet: ['?layout=month-cards'],
-        readSheet: ['?layout=year-board'],
-      },
-    };
+    const askable = askableAbout({ village, calendarId, rolledId, itemId: entry.id, feedKey, openKey });
     for (const client of [village.officer, village.elder]) {
       for (const endpoint of READING) {
         for (const asked of pathsOf(endpoint, askable)) {
