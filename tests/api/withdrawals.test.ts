@@ -30,6 +30,7 @@ import { addFigure } from '#tests/support/figure-api.js';
 import { copyTables, filesWith, putBack, tablesWith } from '#tests/support/search-everything.js';
 import { switchOpenPageOn } from '#tests/support/open-page-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
+import { withdraw } from '#tests/support/withdrawal-api.js';
 import { furnishLevels } from '#tests/support/levelled-village.js';
 
 /**
@@ -351,16 +352,6 @@ describe('things of every level', () => {
     expect((await village.officer.get(path).expect(200)).body).toMatchObject({ entryCount: 1 });
   });
 });
-
-function withdraw(
-  client: Client,
-  itemType: string,
-  itemId: string,
-  changes: { leavesTrace?: boolean; askedById?: string } = {},
-) {
-  const path = `/api/communities/${client.communityId}/items/${itemType}/${itemId}/withdrawal`;
-  return client.post(path, { leavesTrace: false, askedById: null, ...changes });
-}
 
 function isClient(value: unknown): value is Client {
   return typeof value === 'object' && value !== null && 'personId' in value;
