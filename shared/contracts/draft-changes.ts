@@ -21,6 +21,8 @@ export const draftGlance = z.strictObject({
       byMe: z.boolean(),
       /** When the day on which it was really done was typed. */
       doneTypedAt: instant.nullable(),
+      /** Other timings of it that they see. */
+      variants: z.array(z.strictObject({ variantId: id, version: rowVersion })),
     }),
   ),
   /** A submission is out. */

@@ -11,6 +11,7 @@ import {
   openVillage,
   type Village,
 } from '#tests/support/calendar-api.js';
+import { addVariant } from '#tests/support/variant-api.js';
 
 /** Whoever has a draft open learns at once that it became another one: of what they see, and as ids alone. */
 let api: TestApi;
@@ -64,13 +65,35 @@ async function open(client: Client, seconds = 600) {
 const idsOf = (glance: DraftGlance | null) => glance?.entries.map(({ entryId }) => entryId);
 
 describe('a draft that is listened to', () => {
+  it('tells of other timings to those who see them, and of what elders keep to them alone', async () => {
+    const { id } = await addEntry(village.officer, calendarId);
+    const elder = await open(village.elder);
+    const officer = await open(village.officer);
+    await elder.next();
+    await officer.next();
+    const { variantId } = await addVariant(village.elder, calendarId, id);
+    const one = [{ variantId, version: 1 }];
+    expect((await officer.next())?.entries[0]?.variants).toEqual(one);
+    expect((await elder.next())?.entries[0]?.variants).toEqual(one);
+    const kept = await addVariant(village.elder, calendarId, id, { sharingLevel: 'elders' });
+    expect((await elder.next())?.entries[0]?.variants).toEqual([
+      ...one,
+      { variantId: kept.variantId, version: 1 },
+    ]);
+    await village.elder
+      .delete(`/api/calendars/${calendarId}/entries/${id}/variants/${variantId}`)
+      .expect(204);
+    // The officer was told nothing of the one in between.
+    expect((await officer.next())?.entries[0]?.variants).toEqual([]);
+  });
+
   it('tells of every save, order, removal and submission, and whose save it was', async () => {
     const first = await addEntry(village.officer, calendarId, { titleOfficer: 'Zqword' });
     const colleague = await api.signIn('officer');
     const path = `/api/calendars/${calendarId}/entries`;
     const elder = await open(village.elder);
     expect(await elder.next()).toEqual({
-      entries: [{ entryId: first.id, version: 1, byMe: false, doneTypedAt: null }],
+      entries: [{ entryId: first.id, version: 1, byMe: false, doneTypedAt: null, variants: [] }],
       locked: false,
       publishedNumber: null,
     });

@@ -89,7 +89,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
       )}
       {editor.stale && saved && edit && saving.choosingId === entry.id ? (
         <StaleChoice
-          key={saved.version}
+          key={saved.id}
           base={edit.base}
           theirs={saved}
           mine={entry.content}

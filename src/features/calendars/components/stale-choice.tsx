@@ -6,7 +6,16 @@ import type { NamesByKey } from '#src/lib/entry-words.js';
 import { Button } from '#src/ui/button.js';
 import { PickGroup } from '#src/ui/pick.js';
 import { Care } from '#src/ui/surfaces.js';
-import { clashesOf, joined, type Choices, type Clash, type Side } from '../model/stale-choice.js';
+import {
+  clashesOf,
+  isOfRecord,
+  joined,
+  recordPartOf,
+  stillStanding,
+  type Choices,
+  type Clash,
+  type Side,
+} from '../model/stale-choice.js';
 import { UnitValue } from './unit-value.js';
 
 interface StaleChoiceProps {
@@ -19,12 +28,26 @@ interface StaleChoiceProps {
   onTakeTheirs: () => void;
 }
 
+interface Chosen {
+  /** Their text that lay open as it was chosen. */
+  over: EntryInput;
+  choices: Choices;
+  /** They saved once more, and something is to be chosen anew. */
+  again: boolean;
+}
+
 /** Somebody saved a newer text: both stand side by side, part by part, and a person says what stays. */
 export function StaleChoice(props: StaleChoiceProps) {
   const { base, theirs, mine, markers, isSaving, onSave, onTakeTheirs } = props;
   const { t } = useTranslation('calendars');
   const dates = useDateWords();
-  const [choices, setChoices] = useState<Choices>({});
+  const [chosen, setChosen] = useState<Chosen>({ over: theirs.content, choices: {}, again: false });
+  if (chosen.over !== theirs.content) {
+    const choices = stillStanding(chosen.choices, chosen.over, theirs.content);
+    const again = Object.keys(choices).length < Object.keys(chosen.choices).length;
+    setChosen({ over: theirs.content, choices, again });
+  }
+  const { choices, again } = chosen;
   const clashes = clashesOf(base, theirs.content, mine);
   const result = joined(clashes, choices, theirs.content, mine);
   const name = theirs.updatedBy;
@@ -35,6 +58,7 @@ export function StaleChoice(props: StaleChoiceProps) {
           <strong>{t('stale.title')}</strong>
         </h3>
         <p>{t('stale.lead', { name, when: dates.moment(theirs.updatedAt) })}</p>
+        {again && <p role="status">{t('stale.again', { name })}</p>}
       </Care>
       {clashes.map((clash) => (
         <ClashPick
@@ -46,7 +70,7 @@ export function StaleChoice(props: StaleChoiceProps) {
           mine={mine}
           markers={markers}
           onChange={(side) => {
-            setChoices((before) => ({ ...before, [clash.unit]: side }));
+            setChosen((before) => ({ ...before, choices: { ...before.choices, [clash.unit]: side } }));
           }}
         />
       ))}
@@ -89,7 +113,7 @@ function ClashPick({ clash: { unit, first }, name, value, theirs, mine, markers,
         : t('stale.both');
   return (
     <PickGroup
-      label={t(`stale.unit.${unit}`)}
+      label={isOfRecord(unit) ? t(`stale.part.${recordPartOf(unit)}`) : t(`stale.unit.${unit}`)}
       hint={who}
       stacked
       className="two-texts"

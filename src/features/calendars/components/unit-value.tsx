@@ -6,13 +6,27 @@ import { useRecordFacts } from '#src/lib/record-facts.js';
 import { useSharingWords } from '#src/lib/sharing-words.js';
 import { signed } from '#src/lib/signed.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
-import type { Unit } from '../model/stale-choice.js';
+import { isOfRecord, recordPartOf, type Unit } from '../model/stale-choice.js';
+import type { RecordPart } from '../model/record-parts.js';
 
-function RecordValue({ record }: Pick<EntryInput, 'record'>) {
+/** Facts of a part that go by other names than the part itself. */
+const FACTS_OF: Readonly<Partial<Record<RecordPart, readonly string[]>>> = {
+  confidence: ['confidence', 'by'],
+  heard: ['heardWhere', 'heardDay', 'heardLanguage'],
+};
+
+function RecordValue({ part, record }: { part: RecordPart } & Pick<EntryInput, 'record'>) {
   const { t } = useTranslation('calendars');
-  const facts = useRecordFacts();
-  if (record === undefined) return <span className="text-umber-soft">{t('stale.empty')}</span>;
-  const said = Object.values(facts(record)).flat();
+  const facts = useRecordFacts()(record);
+  const said =
+    part === 'signs'
+      ? facts.signs
+      : Object.values(facts)
+          .flat()
+          .filter(({ key }) => (FACTS_OF[part] ?? [part]).includes(key));
+  const [only, ...more] = said;
+  if (only === undefined) return <span className="text-umber-soft">{t('stale.empty')}</span>;
+  if (more.length === 0 && part !== 'signs') return <span className="whitespace-pre-line">{only.value}</span>;
   return (
     <ul>
       {said.map(({ key, label, value }) => (
@@ -41,6 +55,7 @@ export function UnitValue({
   const dates = useDateWords();
   const words = useEntryWords();
   const sharing = useSharingWords();
+  if (isOfRecord(unit)) return <RecordValue part={recordPartOf(unit)} record={content.record} />;
   switch (unit) {
     case 'kind':
       return content.kindWord?.word ?? t(`kind.${content.kind}`);
@@ -76,8 +91,6 @@ export function UnitValue({
       return t(content.agreedToPrint ? 'stale.yes' : 'stale.no');
     case 'sharingLevel':
       return sharing(content.sharingLevel, content.sharing);
-    case 'record':
-      return <RecordValue record={content.record} />;
     default:
       return content[unit] === '' ? (
         <span className="text-umber-soft">{t('stale.empty')}</span>

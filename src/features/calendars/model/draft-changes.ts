@@ -35,7 +35,7 @@ export function newsOf(held: HeldDraft, before: DraftGlance | null, now: DraftGl
     now.entries.some(({ entryId, version }) => version > (versions.get(entryId) ?? 0)) ||
     held.calendar.locked !== now.locked ||
     (held.calendar.published?.number ?? null) !== now.publishedNumber ||
-    (before !== null && daysDone(before) !== daysDone(now));
+    (before !== null && besideEntries(before) !== besideEntries(now));
   return { isOlder, added, saved, gone };
 }
 
@@ -46,10 +46,13 @@ function sameOrder({ entries }: HeldDraft, now: DraftGlance): boolean {
   );
 }
 
-function daysDone({ entries }: DraftGlance): string {
+/** What hangs on entries and is asked for by itself: days on which they were really done, and other timings. */
+function besideEntries({ entries }: DraftGlance): string {
   return entries
-    .filter(({ doneTypedAt }) => doneTypedAt !== null)
-    .map(({ entryId, doneTypedAt }) => `${entryId} ${doneTypedAt ?? ''}`)
+    .flatMap(({ entryId, doneTypedAt, variants }) => [
+      ...(doneTypedAt === null ? [] : [`${entryId} ${doneTypedAt}`]),
+      ...variants.map(({ variantId, version }) => `${entryId} ${variantId} ${version}`),
+    ])
     .sort()
-    .join(' ');
+    .join('\n');
 }

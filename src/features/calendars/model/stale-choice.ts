@@ -1,6 +1,7 @@
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
+import { RECORD_PART_NAMES, sameRecordPart, withRecordPart, type RecordPart } from './record-parts.js';
 
 /**
  * What is chosen together when two people wrote the same entry. The four days belong together, and so do a last
@@ -20,13 +21,22 @@ export const UNITS = {
   otherSigns: ['otherSigns'],
   ifLate: ['ifLate'],
   giver: ['giver'],
-  record: ['record'],
   agreedToPrint: ['agreedToPrint'],
   board: ['board'],
   sharingLevel: ['sharingLevel', 'sharing', 'giverId'],
 } as const satisfies Record<string, readonly (keyof EntryInput)[]>;
 
-export type Unit = keyof typeof UNITS;
+export type PlainUnit = keyof typeof UNITS;
+export type RecordUnit = `record.${RecordPart}`;
+/** The record is long: it is chosen part by part, as everything else. */
+export type Unit = PlainUnit | RecordUnit;
+
+const PLAIN_UNITS = Object.keys(UNITS) as PlainUnit[];
+const ALL_UNITS: readonly Unit[] = [
+  ...PLAIN_UNITS,
+  ...RECORD_PART_NAMES.map((part): RecordUnit => `record.${part}`),
+];
+
 export type Side = 'theirs' | 'mine';
 export type Choices = Partial<Record<Unit, Side>>;
 
@@ -39,14 +49,12 @@ export interface Clash {
 
 /** @param base what I began to write over; null where it is not known any more */
 export function clashesOf(base: EntryInput | null, theirs: EntryInput, mine: EntryInput): Clash[] {
-  return (Object.keys(UNITS) as Unit[])
-    .filter((unit) => !sameUnit(unit, theirs, mine))
-    .map((unit) => {
-      if (base === null) return { unit, first: null };
-      if (sameUnit(unit, base, mine)) return { unit, first: 'theirs' };
-      if (sameUnit(unit, base, theirs)) return { unit, first: 'mine' };
-      return { unit, first: null };
-    });
+  return ALL_UNITS.filter((unit) => !sameUnit(unit, theirs, mine)).map((unit) => {
+    if (base === null) return { unit, first: null };
+    if (sameUnit(unit, base, mine)) return { unit, first: 'theirs' };
+    if (sameUnit(unit, base, theirs)) return { unit, first: 'mine' };
+    return { unit, first: null };
+  });
 }
 
 /** The text that the choices make; null while one is missing. */
@@ -65,7 +73,24 @@ export function joined(
   return result;
 }
 
+/** Choices that still stand after the other side saved again: what changed in theirs since is chosen anew. */
+export function stillStanding(choices: Choices, before: EntryInput, now: EntryInput): Choices {
+  const standing = (Object.entries(choices) as [Unit, Side][]).filter(([unit]) =>
+    sameUnit(unit, before, now),
+  );
+  return Object.fromEntries(standing);
+}
+
+export function isOfRecord(unit: Unit): unit is RecordUnit {
+  return unit.startsWith('record.');
+}
+
+export function recordPartOf(unit: RecordUnit): RecordPart {
+  return unit.slice('record.'.length) as RecordPart;
+}
+
 function sameUnit(unit: Unit, a: EntryInput, b: EntryInput): boolean {
+  if (isOfRecord(unit)) return sameRecordPart(recordPartOf(unit), a.record, b.record);
   return UNITS[unit].every((field) => sameJson(said(a, field), said(b, field)));
 }
 
@@ -76,6 +101,11 @@ function said(content: EntryInput, field: keyof EntryInput): unknown {
 }
 
 function withUnit(unit: Unit, into: EntryInput, from: EntryInput): EntryInput {
+  if (isOfRecord(unit)) {
+    const { record: _before, ...others } = into;
+    const record = withRecordPart(recordPartOf(unit), into.record, from.record);
+    return record === undefined ? others : { ...others, record };
+  }
   const fields: readonly (keyof EntryInput)[] = UNITS[unit];
   const others = Object.entries(into).filter(([field]) => !fields.some((one) => one === field));
   const taken = fields.filter((field) => field in from).map((field) => [field, from[field]]);

@@ -1,7 +1,9 @@
+import { EMPTY_RECORD } from '#shared/contracts/event-record.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
 import type { EntryEdit } from './kept-edits.js';
-import { clashesOf, UNITS, type Unit } from './stale-choice.js';
+import { withRecordPart } from './record-parts.js';
+import { clashesOf, isOfRecord, recordPartOf, UNITS, type PlainUnit } from './stale-choice.js';
 
 /** A draft keeps every way to lead an entry; they belong to one choice. */
 const LEAD_PARTS = ['leadType', 'marker', 'sky', 'fixed', 'seen', 'nature', 'anchor'] as const;
@@ -15,15 +17,22 @@ export function takenIn(edit: EntryEdit, theirs: Entry): EntryEdit | null {
   const clashes = clashesOf(edit.base, theirs.content, contentOf(edit.draft));
   if (clashes.some(({ first }) => first === null)) return null;
   const saved = draftOf(theirs.content);
-  const taken = clashes.filter(({ first }) => first === 'theirs').flatMap(({ unit }) => partsOf(unit));
+  const units = clashes.filter(({ first }) => first === 'theirs').map(({ unit }) => unit);
+  const taken = units.flatMap((unit) => (isOfRecord(unit) ? [] : partsOf(unit)));
+  const record = units
+    .filter(isOfRecord)
+    .reduce(
+      (own, unit) => withRecordPart(recordPartOf(unit), own, saved.record) ?? EMPTY_RECORD,
+      edit.draft.record,
+    );
   const draft = Object.fromEntries(
     (Object.keys({ ...edit.draft, ...saved }) as (keyof EntryDraft)[])
       .map((part) => [part, taken.includes(part) ? saved[part] : edit.draft[part]] as const)
       .filter(([, value]) => value !== undefined),
   ) as unknown as EntryDraft;
-  return { ...edit, draft, base: theirs.content, baseVersion: theirs.version };
+  return { ...edit, draft: { ...draft, record }, base: theirs.content, baseVersion: theirs.version };
 }
 
-function partsOf(unit: Unit): readonly (keyof EntryDraft)[] {
+function partsOf(unit: PlainUnit): readonly (keyof EntryDraft)[] {
   return unit === 'lead' ? LEAD_PARTS : UNITS[unit];
 }

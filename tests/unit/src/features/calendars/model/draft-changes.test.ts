@@ -3,11 +3,12 @@ import type { DraftGlance } from '#shared/contracts/draft-changes.js';
 import { newsOf } from '#src/features/calendars/model/draft-changes.js';
 
 const told = (
-  entries: readonly (readonly [string, number, { byMe?: boolean; done?: string }?])[],
+  entries: readonly (readonly [string, number, { byMe?: boolean; done?: string; variant?: number }?])[],
   rest: Partial<DraftGlance> = {},
 ): DraftGlance => ({
-  entries: entries.map(([entryId, version, { byMe = false, done = null } = {}]) => ({
+  entries: entries.map(([entryId, version, { byMe = false, done = null, variant } = {}]) => ({
     ...{ entryId, version, byMe, doneTypedAt: done },
+    variants: variant === undefined ? [] : [{ variantId: 'theirs', version: variant }],
   })),
   locked: false,
   publishedNumber: null,
@@ -75,5 +76,19 @@ describe('news of a draft', () => {
   it('never take a page for older than it is: its own answer came before the glance', () => {
     const ahead = { ...held, entries: [{ id: 'sow', version: 2 }, ...held.entries.slice(1)] };
     expect(newsOf(ahead, same, same).isOlder).toBe(false);
+  });
+
+  it('ask for other timings anew where one was put in, saved or taken out', () => {
+    const with1 = told([
+      ['sow', 1, { variant: 1 }],
+      ['weed', 3],
+    ]);
+    const with2 = told([
+      ['sow', 1, { variant: 2 }],
+      ['weed', 3],
+    ]);
+    const older = [newsOf(held, same, with1), newsOf(held, with1, with2), newsOf(held, with2, same)];
+    expect(older.map(({ isOlder }) => isOlder)).toEqual([true, true, true]);
+    expect(newsOf(held, with1, with1).isOlder).toBe(false);
   });
 });

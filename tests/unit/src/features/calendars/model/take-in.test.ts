@@ -3,6 +3,7 @@ import type { EntryInput } from '#shared/contracts/calendars.js';
 import { contentOf, draftOf } from '#src/features/calendars/model/entry-draft.js';
 import { takenIn } from '#src/features/calendars/model/take-in.js';
 import { content, entryOf, tazimelMarkers } from '#tests/support/draft-of-tazimel.js';
+import { wholeRecord } from '#tests/support/event-record.js';
 
 const markers = await tazimelMarkers();
 const theirs = (changes: Partial<EntryInput>) => ({ ...entryOf(markers, 1, changes), version: 2 });
@@ -15,6 +16,15 @@ describe('a newer state under what somebody writes', () => {
     const laid = takenIn(edit({ notes: 'All terraces' }), theirs({ crop: 'millet' }));
     expect(laid).toMatchObject({ baseVersion: 2, base: { crop: 'millet' } });
     expect(laid && contentOf(laid.draft)).toEqual(content({ notes: 'All terraces', crop: 'millet' }));
+  });
+
+  it('lays what only the other changed in the record under what is being written there', () => {
+    const record = wholeRecord();
+    const base = content({ record });
+    const mine = { ...record, work: { ...record.work, owns: 'each house' } };
+    const saved = { ...record, heard: { ...record.heard, where: 'hall' } };
+    const laid = takenIn({ ...edit({ record: mine }), base }, theirs({ record: saved }));
+    expect(laid && contentOf(laid.draft).record).toEqual({ ...mine, heard: saved.heard });
   });
 
   it('brings its lead with all that belongs to it, and leaves another last date that waits in the form', () => {
