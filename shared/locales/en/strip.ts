@@ -19,7 +19,7 @@ export const texts = {
   marketDays: 'Days from market to market',
   marketDay: 'A day with a market',
   moonShort: 'Moon {{nth}}',
-  moonLong: 'Moon {{nth}} of the year',
+  moonLong: 'Moon {{nth}} of the year from {{day}}',
   marketWeek: 'Market week from {{day}}',
   scaleTable: '{{scale}} as a table',
   part: 'Part',

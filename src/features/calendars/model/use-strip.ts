@@ -7,6 +7,7 @@ import { dateOfDayNumber } from '#src/lib/days.js';
 import { windowDayNumbers } from '#src/lib/entry-words.js';
 import type { DaySpan } from '#src/ui/pictures/day-span.js';
 import { moonStartsQuery } from '../api/moons-query.js';
+import { countedMoons, yearsToCount } from './strip-moons.js';
 import { civilMonths, daysOf, knownCalendars, marketWeeks, runsFrom, type ScalePart } from './strip-scale.js';
 import { centreOf, nextCentre, wholeSpan, zoomedBy, zoomedSpan, type Zoom } from './strip-span.js';
 import { keepStripSettings, readStripSettings, type StripSettings } from './strip-view.js';
@@ -70,28 +71,32 @@ function yearsOf({ first, last }: DaySpan): number[] {
 
 /** The scale under the months; null where none is wanted, or it is on its way. */
 function useSecondScale(
-  { calendar }: Editor,
+  { calendar, community }: Editor,
   { scale, marketDays, marketDay }: StripSettings,
   span: DaySpan,
 ): { name: string; parts: ScalePart[] } | null {
   const { t, i18n } = useTranslation('strip');
   const dates = useDateWords();
   const locale = intlLocale(i18n.language);
+  const yearStart = community?.yearStart.date ?? null;
+  const years = useMemo(
+    () => (scale === 'moons' && yearStart !== null ? yearsToCount(span, yearStart) : []),
+    [scale, span, yearStart],
+  );
   const moons = useQueries({
-    queries: yearsOf(span).map((year) => ({
-      ...moonStartsQuery(calendar.placeId, year),
-      enabled: scale === 'moons',
-    })),
-    combine: (answers) => answers.flatMap(({ data }) => data ?? []),
+    queries: years.map((year) => moonStartsQuery(calendar.placeId, year)),
+    // With a year on its way the numbers would be wrong.
+    combine: (answers) =>
+      answers.every(({ data }) => data !== undefined) ? answers.flatMap(({ data }) => data ?? []) : [],
   });
   return useMemo(() => {
     if (scale === 'none') return null;
     if (scale === 'moons') {
-      const starts = [...new Set(moons)].sort((a, b) => a - b);
-      const named = starts.map((dayNumber, index) => {
-        const nth = index + 1;
-        const name = { short: t('moonShort', { nth }), narrow: String(nth), long: t('moonLong', { nth }) };
-        return { dayNumber, ...name };
+      const [fromYear] = years;
+      if (yearStart === null || fromYear === undefined) return null;
+      const named = countedMoons(moons, fromYear, yearStart).map(({ dayNumber, nth, yearStartDay }) => {
+        const long = t('moonLong', { nth, day: dates.day(yearStartDay, 'year') });
+        return { dayNumber, short: t('moonShort', { nth }), narrow: String(nth), long };
       });
       return named.length === 0 ? null : { name: t('scale.moons'), parts: runsFrom(named, span) };
     }
@@ -105,5 +110,5 @@ function useSecondScale(
     }
     const known = knownCalendars(locale).find(({ calendar: key }) => key === scale);
     return known ? { name: known.name, parts: civilMonths(span, known.calendar, locale) } : null;
-  }, [scale, marketDays, marketDay, span, moons, t, dates, locale]);
+  }, [scale, marketDays, marketDay, span, yearStart, years, moons, t, dates, locale]);
 }
