@@ -1,6 +1,11 @@
 import type { Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 
 /*
  * Weeding is counted from the day on which sowing is really done. Until that day is typed there is no window, only what it
@@ -25,7 +30,7 @@ test('weeding has no days until the day of sowing is typed', async ({ page }) =>
     .or(page.getByRole('link', { name: 'Open the draft' }))
     .first()
     .click();
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   const calendarPath = new URL(page.url()).pathname;
 
   await page.getByLabel(/^Name of the work or rite/).fill(SOWING);
@@ -36,7 +41,7 @@ test('weeding has no days until the day of sowing is typed', async ({ page }) =>
   await save(page, SOWING);
 
   await page.goto(calendarPath);
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill(WEEDING);
   await page.getByRole('radio', { name: /^The day other work is done/ }).check();
   await page.getByLabel('Which work').selectOption(SOWING);

@@ -1,6 +1,11 @@
 import type { Page, Route } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 import { beginEmptyCalendar, draftOf, makeIrvelOfficer, putIn } from '#tests/support/officer-pair.js';
 
 /*
@@ -109,7 +114,7 @@ test('writes of the editor count once, whatever the network does to them', async
   await page.goto(`/calendars/${calendarId}`);
 
   await once(page, MISHAPS.late);
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill('Sow');
   await page.getByRole('radio', { name: /^A fixed date/ }).check();
   await page.getByLabel('Who set it, and where it is written').first().fill('the village');
@@ -154,7 +159,7 @@ test('what was on its way when the page went is sent again by itself, once', asy
   };
   await page.route('**/api/calendars/**', lost);
   await page.goto(`/calendars/${calendarId}`);
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill('Sow');
   await page.getByRole('radio', { name: /^A fixed date/ }).check();
   await page.getByLabel('Who set it, and where it is written').first().fill('the village');

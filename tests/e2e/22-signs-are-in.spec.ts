@@ -1,6 +1,11 @@
 import type { Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 
 /*
  * An officer describes two signs once and lets an entry wait for them. An observer with a small phone says that they were
@@ -29,7 +34,7 @@ test('an officer lets an entry wait for two signs of the village’s list', asyn
 
   await page.goto('/calendars');
   await page.getByRole('link', { name: 'Open the draft' }).first().click();
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill(ENTRY);
   const when = page.locator('[data-group="when"]');
   await when.getByRole('radio', { name: /^A fixed date/ }).check();

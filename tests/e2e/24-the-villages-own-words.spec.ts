@@ -1,5 +1,10 @@
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 
 /*
  * An officer gives the village its own words, writes an entry with them and with a sign of its own, and marks that as seen.
@@ -47,7 +52,7 @@ test('an entry speaks these words, its warning is mended, and its own sign is ma
   await signIn(page, 'officer2');
   await page.goto('/calendars');
   await page.getByRole('link', { name: 'Open the draft' }).first().click();
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill(ENTRY);
   await page.getByLabel('Kind', { exact: true }).selectOption(KIND);
   await page.getByLabel('Crop or variety').fill('early tuber');

@@ -1,7 +1,12 @@
 import { execFileSync } from 'node:child_process';
 import type { Browser, Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 
 /*
  * An officer with a new place: coordinates as degrees and minutes, a skyline from a pasted table, a calendar for 2027
@@ -33,7 +38,7 @@ test('an officer goes from an empty place to a submission of five entries', asyn
   await page.getByRole('button', { name: 'Add the first entry' }).click();
   await refusedWithoutATitle(page);
   for (const [index, { title, star }] of WORK.entries()) {
-    if (index > 0) await page.getByRole('button', { name: 'Add an entry' }).click();
+    if (index > 0) await beginEntry(page);
     await addEntry(page, title, star);
   }
   await expectAccessible(page);

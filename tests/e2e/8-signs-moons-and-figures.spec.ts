@@ -1,7 +1,12 @@
 import { readFileSync } from 'node:fs';
 import type { Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
-import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import {
+  beginEntry,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  signIn,
+} from '#tests/support/journey-steps.js';
 
 /*
  * An officer high in the hills leads entries by the Sun, by a star at its height and by a figure of the village, reads
@@ -25,7 +30,7 @@ test('entries go by the Sun and by a star at its height, as far as the sheet', a
     .or(page.getByRole('link', { name: 'Open the draft' }))
     .first()
     .click();
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   const calendarPath = new URL(page.url()).pathname;
 
   await page.getByLabel(/^Name of the work or rite/).fill(BY_THE_SUN);
@@ -39,7 +44,7 @@ test('entries go by the Sun and by a star at its height, as far as the sheet', a
   await expect(page.getByText(/About 21.June, between 16 and 26.June/).last()).toBeVisible();
   await save(page, BY_THE_SUN);
 
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill(BY_A_STAR);
   await page.getByRole('button', { name: 'Choose a star or figure' }).click();
   await dialog.getByRole('radio', { name: 'Sun and sky' }).check();
@@ -106,7 +111,7 @@ test('a figure is put together by keyboard, stands among the stars and leads an 
 
   await page.getByRole('link', { name: 'Calendar' }).click();
   await page.getByRole('link', { name: 'Open the draft' }).click();
-  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await beginEntry(page);
   await page.getByLabel(/^Name of the work or rite/).fill(BY_THE_FIGURE);
   await page.getByRole('button', { name: 'Choose a star or figure' }).click();
   const dialog = page.getByRole('dialog');

@@ -11,6 +11,12 @@ export async function signIn(page: Page, mailbox: string): Promise<void> {
   await expect(page).not.toHaveURL(/sign-in/u);
 }
 
+/** Opens a new entry in the editor and waits for its empty form: what is typed sooner would go into the one before. */
+export async function beginEntry(page: Page): Promise<void> {
+  await page.getByRole('button', { name: 'Add an entry' }).click();
+  await expect(page.getByLabel(/^Name of the work or rite/u)).toHaveValue('');
+}
+
 /** No serious or critical accessibility violation on the screen as it stands (axe-core, WCAG 2.2 A and AA). */
 export async function expectAccessible(page: Page): Promise<void> {
   const { violations } = await new AxeBuilder({ page })

@@ -1,5 +1,6 @@
 import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
+import { newId } from '#src/lib/new-id.js';
 import { useWideScreen } from '#src/lib/wide-screen.js';
 import { newEntryId } from './kept-edits.js';
 import type { Born } from './use-entry-edits.js';
@@ -40,7 +41,8 @@ export function useSelection(born: Born): Selection {
       setSearch({ entry: entryId }, { replace: true, preventScrollReset: true });
     },
     openNew: () => {
-      open(newEntryId(Date.now().toString(36)));
+      // Never a word that was there before: a saved entry goes on being known by the word that it began with.
+      open(newEntryId(newId()));
     },
     close: () => {
       setSearch({}, { replace: true, preventScrollReset: isWide });
