@@ -58,7 +58,10 @@ function Year({ review, writing }: { review: SeasonReview; writing: Writing }) {
             title={t('title', { year })}
             under={label === null ? t('underDraft', { place }) : t('under', { place, label })}
             backTo={paths.calendars()}
-          >
+          />
+          <p className="mb-4 max-w-prose">{t('lead')}</p>
+          {/* Below the title: beside it a phone has no room for both. */}
+          <div className="mb-4">
             <Button
               icon={<Printer aria-hidden size={20} />}
               onClick={() => {
@@ -67,8 +70,7 @@ function Year({ review, writing }: { review: SeasonReview; writing: Writing }) {
             >
               {t('print')}
             </Button>
-          </Mast>
-          <p className="mb-4 max-w-prose">{t('lead')}</p>
+          </div>
           <div className="grid grid-cols-1 gap-4">
             <Board title={t('wholeYear')}>
               <Lessons calendarId={calendarId} entryId={null} lessons={review.lessons} />
