@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { useCallback, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
@@ -46,6 +46,7 @@ export function useEntryWords(): EntryWords {
   const dates = useDateWords();
   const sign = useSkySignWords();
   const titles = useEntryTitles();
+  const windowSentence = useWindowSentence();
   return useMemo(() => {
     const leadWords = (group: 'lead' | 'leadAlone', lead: EntryLead, markers: NamesByKey) => {
       if (lead.type === 'fixed-date') {
@@ -98,15 +99,25 @@ export function useEntryWords(): EntryWords {
         if (bestFrom === bestTo) return t('days.bestDay', { day: dates.day(bestFrom) });
         return t('days.best', { range: dates.range(bestFrom, bestTo) });
       },
-      windowSentence: (window) =>
-        t('days.sentence', {
-          earliest: dates.day(window.earliest),
-          bestFrom: dates.day(window.bestFrom),
-          bestTo: dates.day(window.bestTo),
-          lastAdvised: dates.day(window.lastAdvised),
-        }),
+      windowSentence,
       lead: ({ lead }, markers) => leadWords('lead', lead, markers),
       leadAlone: ({ lead }, markers) => leadWords('leadAlone', lead, markers),
     };
-  }, [t, dates, sign, titles]);
+  }, [t, dates, sign, titles, windowSentence]);
+}
+
+/** The four days as a sentence, by date or by day number. Needs the texts `calendars`. */
+export function useWindowSentence(): (window: EntryWindow | WindowDayNumbers) => string {
+  const { t } = useTranslation('calendars');
+  const dates = useDateWords();
+  return useCallback(
+    ({ earliest, bestFrom, bestTo, lastAdvised }) =>
+      t('days.sentence', {
+        earliest: dates.day(earliest),
+        bestFrom: dates.day(bestFrom),
+        bestTo: dates.day(bestTo),
+        lastAdvised: dates.day(lastAdvised),
+      }),
+    [t, dates],
+  );
 }

@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useRef, useState, type KeyboardEvent } from 'react';
+import { memo, useCallback, useEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { classNames } from '../class-names.js';
 import { daysOfKey, type MovePart } from './day-drag.js';
 import { percent, startPercent, type DaySpan } from './day-span.js';
@@ -11,17 +11,23 @@ export interface BarMoves {
   onMove: (key: string, part: MovePart, days: number) => void;
   /** Where the window would stand. */
   preview: (key: string, part: MovePart, days: number) => WindowDays;
-  /** What a handle moves, and where that stands now; read aloud. */
-  label: (key: string, part: MovePart) => string;
-  value: (key: string, part: MovePart) => string;
-  /** The days of a window that is being dragged. */
-  say: (days: WindowDays) => string;
+  /** Stays the same until the language changes, so that of hundreds of handles only what was moved is drawn anew. */
+  words: MoveWords;
   /** Closer or wider, by the keys + and −. */
   onZoom?: ((step: 1 | -1) => void) | undefined;
 }
 
+export interface MoveWords {
+  /** What a handle moves, and where that stands now; read aloud. */
+  label: (name: string, part: MovePart, mayMove: boolean) => string;
+  value: (days: WindowDays, part: MovePart) => string;
+  /** The days of a window that is being dragged. */
+  say: (days: WindowDays) => string;
+}
+
 export interface SurfaceBar {
   key: string;
+  name: string;
   days: WindowDays;
   kind?: 'work' | 'watch' | undefined;
   topPx: number;
@@ -78,46 +84,51 @@ export function BarSurface({ span, pxPerDay, barHeightPx, bars, chosen, moves, o
   useEffect(() => {
     keys.current = onKeyDown;
   });
-  // While one bar is dragged, none of the others is drawn again.
-  const handles = useMemo(
-    () =>
-      bars.map((bar) => (
-        <BarHandle
-          key={bar.key}
-          {...{ span, barHeightPx, bar, moves }}
-          isTabStop={bar.key === tabStop}
-          isChosen={bar.key === chosen}
-          onKeyDown={(event, part) => keys.current(event, bar.key, part)}
-        />
-      )),
-    [span, barHeightPx, bars, moves, tabStop, chosen],
-  );
+  const steadyKeyDown = useCallback<OnBarKey>((...pressed) => {
+    keys.current(...pressed);
+  }, []);
   return (
     <div ref={box} {...handlers}>
-      {handles}
+      {bars.map(({ key, name, days, topPx }) => (
+        <BarHandle
+          key={key}
+          {...{ span, barHeightPx, name, days, topPx }}
+          barKey={key}
+          words={moves.words}
+          mayMove={moves.mayMove(key)}
+          isTabStop={key === tabStop}
+          isChosen={key === chosen}
+          onKeyDown={steadyKeyDown}
+        />
+      ))}
       {drag && <Ghost {...{ span, barHeightPx, bars, moves, drag }} />}
     </div>
   );
 }
 
+type OnBarKey = (event: KeyboardEvent<HTMLElement>, key: string, part: MovePart) => void;
+
+/** Every part stays the same while its bar does: `memo` then draws nothing again. */
 interface BarHandleProps {
   span: DaySpan;
   barHeightPx: number;
-  bar: SurfaceBar;
-  moves: BarMoves;
+  barKey: string;
+  name: string;
+  days: WindowDays;
+  topPx: number;
+  words: MoveWords;
+  mayMove: boolean;
   isTabStop: boolean;
   isChosen: boolean;
-  onKeyDown: (event: KeyboardEvent<HTMLElement>, part: MovePart) => void;
+  onKeyDown: OnBarKey;
 }
 
-function BarHandle({ span, barHeightPx, bar, moves, isTabStop, isChosen, onKeyDown }: BarHandleProps) {
-  const { key, days, topPx } = bar;
+const BarHandle = memo(function BarHandle(props: BarHandleProps) {
+  const { span, barHeightPx, days, topPx, mayMove, isTabStop, isChosen } = props;
   const from = Math.max(days.earliest, span.first);
   const to = Math.min(days.lastAdvised, span.last) + 1;
   const middle = percent(startPercent((from + to) / 2, span));
   const half = `max(${String(TARGET / 2)}px, ${percent((startPercent(to, span) - startPercent(from, span)) / 2)})`;
-  const mayMove = moves.mayMove(key);
-  const each = { span, bar, moves, onKeyDown };
   const ring = (left: string) => ({
     ...{ left, width: TARGET, height: TARGET },
     top: topPx + barHeightPx / 2 - TARGET / 2,
@@ -125,9 +136,8 @@ function BarHandle({ span, barHeightPx, bar, moves, isTabStop, isChosen, onKeyDo
   return (
     <>
       <DaySlider
-        {...each}
+        {...props}
         part="all"
-        isFixed={!mayMove}
         tabIndex={isTabStop ? 0 : -1}
         className={classNames('day-grip', !mayMove && 'fixed')}
         style={{
@@ -139,55 +149,48 @@ function BarHandle({ span, barHeightPx, bar, moves, isTabStop, isChosen, onKeyDo
       />
       {isChosen && mayMove && days.earliest >= span.first && (
         <DaySlider
-          {...each}
+          {...props}
           part="start"
           className="day-ring"
           style={ring(`calc(${middle} - ${half} - ${String(TARGET)}px)`)}
         />
       )}
       {isChosen && mayMove && days.lastAdvised <= span.last && (
-        <DaySlider {...each} part="end" className="day-ring" style={ring(`calc(${middle} + ${half})`)} />
+        <DaySlider {...props} part="end" className="day-ring" style={ring(`calc(${middle} + ${half})`)} />
       )}
     </>
   );
-}
+});
 
-interface DaySliderProps extends Pick<BarHandleProps, 'span' | 'bar' | 'moves' | 'onKeyDown'> {
+interface DaySliderProps extends Pick<
+  BarHandleProps,
+  'span' | 'barKey' | 'name' | 'days' | 'words' | 'mayMove' | 'onKeyDown'
+> {
   part: MovePart;
-  isFixed?: boolean;
   tabIndex?: 0 | -1;
   className: string;
   style: Record<string, string | number>;
 }
 
-function DaySlider({
-  span,
-  bar: { key, days },
-  moves,
-  onKeyDown,
-  part,
-  isFixed = false,
-  tabIndex = 0,
-  className,
-  style,
-}: DaySliderProps) {
+function DaySlider(props: DaySliderProps) {
+  const { span, barKey, name, days, words, mayMove, onKeyDown, part, tabIndex = 0, className, style } = props;
   const day = part === 'end' ? days.lastAdvised : days.earliest;
   return (
     <div
       role="slider"
       tabIndex={tabIndex}
-      data-bar={key}
+      data-bar={barKey}
       data-part={part}
-      aria-label={moves.label(key, part)}
+      aria-label={words.label(name, part, mayMove)}
       aria-valuemin={span.first}
       aria-valuemax={span.last}
       aria-valuenow={Math.min(span.last, Math.max(span.first, day))}
-      aria-valuetext={moves.value(key, part)}
-      aria-readonly={isFixed || undefined}
+      aria-valuetext={words.value(days, part)}
+      aria-readonly={!mayMove || undefined}
       className={className}
       style={style}
       onKeyDown={(event) => {
-        onKeyDown(event, part);
+        onKeyDown(event, barKey, part);
       }}
     />
   );
@@ -213,7 +216,7 @@ function Ghost({ span, barHeightPx, bars, moves, drag }: GhostProps) {
         <WindowShape span={span} days={days} kind={bar.kind} y={0} height={barHeightPx} />
       </svg>
       <span className="on-picture" style={{ left: percent(at) }} aria-hidden>
-        {moves.say(days)}
+        {moves.words.say(days)}
       </span>
     </div>
   );

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { classNames } from '../class-names.js';
 import { useWidth } from '../use-width.js';
 import { percent, startPercent, stretch, type DaySpan } from './day-span.js';
@@ -14,7 +15,13 @@ export interface ScaleMonth {
 const SHORT_NAME_WIDTH = 38;
 
 /** Names of the months under or over a lane; one letter each where there is little room. */
-export function MonthScale({ span, months }: { span: DaySpan; months: readonly ScaleMonth[] }) {
+export const MonthScale = memo(function MonthScale({
+  span,
+  months,
+}: {
+  span: DaySpan;
+  months: readonly ScaleMonth[];
+}) {
   const [ref, width] = useWidth(600);
   const narrow = width / months.length < SHORT_NAME_WIDTH;
   return (
@@ -30,10 +37,16 @@ export function MonthScale({ span, months }: { span: DaySpan; months: readonly S
       })}
     </div>
   );
-}
+});
 
 /** Thin lines at the beginnings of months, through lanes and bars. Lay it under them in a `relative` box. */
-export function MonthLines({ span, months }: { span: DaySpan; months: readonly ScaleMonth[] }) {
+export const MonthLines = memo(function MonthLines({
+  span,
+  months,
+}: {
+  span: DaySpan;
+  months: readonly ScaleMonth[];
+}) {
   return (
     <svg
       className="picture"
@@ -57,4 +70,4 @@ export function MonthLines({ span, months }: { span: DaySpan; months: readonly S
       )}
     </svg>
   );
-}
+});

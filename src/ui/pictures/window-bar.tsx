@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { classNames } from '../class-names.js';
 import { percent, startPercent, stretch, type DaySpan } from './day-span.js';
 
@@ -68,7 +69,13 @@ interface WindowShapeProps {
 }
 
 /** The bar alone, for pictures that draw several into one SVG. */
-export function WindowShape({ span, days, kind = 'work', y, height }: WindowShapeProps) {
+export const WindowShape = memo(function WindowShape({
+  span,
+  days,
+  kind = 'work',
+  y,
+  height,
+}: WindowShapeProps) {
   if (days.earliest === days.lastAdvised)
     return <FixedDay span={span} day={days.earliest} y={y} height={height} />;
   if (kind === 'watch')
@@ -81,7 +88,7 @@ export function WindowShape({ span, days, kind = 'work', y, height }: WindowShap
       <Part span={span} from={days.bestFrom} to={days.bestTo} look="pic-best" y={y} height={height} />
     </>
   );
-}
+});
 
 function Part({
   span,

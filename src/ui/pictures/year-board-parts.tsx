@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { classNames } from '../class-names.js';
 import type { WindowDays } from './window-bar.js';
 
@@ -18,18 +19,21 @@ export function Pairing({ x, fromY, toX, toY }: { x: string; fromY: number; toX:
 }
 
 interface BarNameProps {
+  barKey: string;
   name: string;
   isChosen: boolean;
-  maxWidth: number;
-  style: { left: number; top: number };
-  onChoose: (() => void) | undefined;
+  maxWidthPx: number;
+  leftPx: number;
+  topPx: number;
+  onChoose: ((key: string) => void) | undefined;
 }
 
 /** Out of the tab order: the list beside the strip is the way for keys and ears. */
-export function BarName({ name, isChosen, maxWidth, style, onChoose }: BarNameProps) {
+export const BarName = memo(function BarName(props: BarNameProps) {
+  const { barKey, name, isChosen, maxWidthPx, leftPx, topPx, onChoose } = props;
   const look = {
     className: classNames('on-picture year-board-label', isChosen && 'chosen'),
-    style: { ...style, maxWidth },
+    style: { left: leftPx, top: topPx, maxWidth: maxWidthPx },
     title: name,
   };
   if (onChoose === undefined) {
@@ -40,8 +44,15 @@ export function BarName({ name, isChosen, maxWidth, style, onChoose }: BarNamePr
     );
   }
   return (
-    <button type="button" tabIndex={-1} {...look} onClick={onChoose}>
+    <button
+      type="button"
+      tabIndex={-1}
+      {...look}
+      onClick={() => {
+        onChoose(barKey);
+      }}
+    >
       {name}
     </button>
   );
-}
+});

@@ -93,7 +93,9 @@ export function YearBoard(props: YearBoardProps) {
     () =>
       placed.flatMap(({ key, row }): SurfaceBar[] => {
         const bar = byKey.get(key);
-        return bar ? [{ key, days: bar.days, kind: bar.kind, topPx: barsTop + row * BAR_PITCH }] : [];
+        if (bar === undefined) return [];
+        const { name, days, kind } = bar;
+        return [{ key, name, days, kind, topPx: barsTop + row * BAR_PITCH }];
       }),
     [placed, byKey, barsTop],
   );
@@ -186,11 +188,13 @@ export function YearBoard(props: YearBoardProps) {
             bar && (
               <BarName
                 key={place.key}
+                barKey={place.key}
                 name={bar.name}
                 isChosen={place.key === chosen}
-                maxWidth={labelMax}
-                style={{ left: place.labelStartPx, top: barY(place) + BAR_HEIGHT + 2 }}
-                onChoose={onChoose === undefined ? undefined : () => onChoose(place.key)}
+                maxWidthPx={labelMax}
+                leftPx={place.labelStartPx}
+                topPx={barY(place) + BAR_HEIGHT + 2}
+                onChoose={onChoose}
               />
             )
           );

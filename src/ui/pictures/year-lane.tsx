@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import type { NightState } from '#shared/sky/vocabulary.js';
 import { classNames } from '../class-names.js';
 import { Peg } from '../pegs.js';
@@ -43,7 +44,14 @@ const BANDS: Record<Exclude<NightState, 'hidden'>, readonly (readonly [number, n
 };
 
 /** The nights of a year: months run left to right, the night runs down. Place tells the state, colour helps. */
-export function YearLane({ span, segments, label, height = 48, today, className }: YearLaneProps) {
+export const YearLane = memo(function YearLane({
+  span,
+  segments,
+  label,
+  height = 48,
+  today,
+  className,
+}: YearLaneProps) {
   const hasPeg = today !== undefined && today !== null && today >= span.first && today <= span.last;
   const top = hasPeg ? PEG_ROOM : 0;
   // Short states are drawn last: their least width may reach over a neighbour, never under it.
@@ -62,7 +70,7 @@ export function YearLane({ span, segments, label, height = 48, today, className 
       </svg>
     </div>
   );
-}
+});
 
 /**
  * Place of a state along the lane. A gap stands before every state but the first; a state of a few nights keeps its

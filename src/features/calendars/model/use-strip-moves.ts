@@ -1,8 +1,8 @@
 import { startTransition, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
-import { useEntryWords, windowDayNumbers } from '#src/lib/entry-words.js';
-import type { BarMoves } from '#src/ui/pictures/bar-surface.js';
+import { useWindowSentence, windowDayNumbers } from '#src/lib/entry-words.js';
+import type { BarMoves, MoveWords } from '#src/ui/pictures/bar-surface.js';
 import type { DraftChange } from './use-entry-edits.js';
 import { isStale } from './shown-entries.js';
 import type { ShownEntry } from './preview-dates.js';
@@ -22,12 +22,9 @@ export function changeEntry({ edits, newStart }: Editor, entry: ShownEntry, chan
 
 /** Moving windows on the strip: a change of the entry's four days like any other. */
 export function useStripMoves(editor: Editor, onZoom: (step: 1 | -1) => void): BarMoves {
-  const { t } = useTranslation(['calendars', 'strip']);
-  const dates = useDateWords();
-  const words = useEntryWords();
+  const words = useMoveWords();
   return useMemo(() => {
     const byId = new Map(editor.shown.map((entry) => [entry.id, entry]));
-    const titleOf = (entry: ShownEntry | undefined) => entry?.content.titleOfficer || t('editor.untitled');
     const windowOf = (key: string) => byId.get(key)?.dates?.window ?? null;
     const mayMove = (key: string) => {
       const entry = byId.get(key);
@@ -51,18 +48,25 @@ export function useStripMoves(editor: Editor, onZoom: (step: 1 | -1) => void): B
           ? movedDays(windowDayNumbers(window), entry.content.offsets, part, days)
           : NOWHERE;
       },
-      label: (key, part) => {
-        const title = titleOf(byId.get(key));
-        return mayMove(key) ? t(`strip.move.${part}`, { title }) : t('strip:notYours', { title });
-      },
-      value: (key, part) => {
-        const window = windowOf(key);
-        if (window === null) return '';
-        if (part === 'all') return words.windowSentence(window);
-        return dates.day(part === 'start' ? window.earliest : window.lastAdvised);
-      },
-      say: ({ earliest, lastAdvised }) => dates.range(earliest, lastAdvised, 'short'),
+      words,
       onZoom,
     };
-  }, [editor, onZoom, t, dates, words]);
+  }, [editor, onZoom, words]);
+}
+
+/** Of a bar's own name and days alone: they change with the language only. */
+function useMoveWords(): MoveWords {
+  const { t } = useTranslation(['calendars', 'strip']);
+  const dates = useDateWords();
+  const sentence = useWindowSentence();
+  return useMemo(
+    () => ({
+      label: (title, part, mayMove) =>
+        mayMove ? t(`strip.move.${part}`, { title }) : t('strip:notYours', { title }),
+      value: (days, part) =>
+        part === 'all' ? sentence(days) : dates.day(part === 'start' ? days.earliest : days.lastAdvised),
+      say: ({ earliest, lastAdvised }) => dates.range(earliest, lastAdvised, 'short'),
+    }),
+    [t, dates, sentence],
+  );
 }
