@@ -38,8 +38,8 @@ import { CopyingService } from './features/imports/copying.service.js';
 import { FileImportService } from './features/imports/file-import.service.js';
 import { TableImportService } from './features/imports/table-import.service.js';
 import { importsRoutes } from './features/imports/imports.routes.js';
+import { openPageServices } from './features/open-page/open-page-services.js';
 import { openPageRoutes } from './features/open-page/open-page.routes.js';
-import { OpenPageService } from './features/open-page/open-page.service.js';
 import { LetterChoicesService } from './features/letters/letter-choices.service.js';
 import { LetterPlannerService } from './features/letters/letter-planner.service.js';
 import { LetterRounds } from './features/letters/letter-rounds.service.js';
@@ -313,7 +313,7 @@ export function createApp(options: AppOptions): App {
     tables: new TableImportService(dataSource, clock, sky),
     copying: new CopyingService(dataSource, clock, sky, contents),
   });
-  openPageRoutes(router, mount, new OpenPageService(dataSource, clock, contents, config.publicUrl));
+  openPageRoutes(router, mount, openPageServices(dataSource, clock, contents, config.publicUrl));
   const consents = new ConsentsService(dataSource, clock, proofs);
   const coming = new ComingMarkersService(skyYears, stars);
   const waiting = new WaitingService(versions, answers, ownAnswers);

@@ -45,6 +45,21 @@ export function mayUse(
   });
 }
 
+/** Which yes a use of a thing still lacks: nobody was asked, somebody owes an answer, or this was not agreed to. */
+export type MissingYes = 'nobody-asked' | 'no-answer' | 'not-agreed';
+
+/** @returns null where nothing is missing */
+export function missingYes(
+  consents: readonly ConsentFact[],
+  use: ConsentUse,
+  kind: EntryKind | null,
+  today: string,
+): MissingYes | null {
+  if (mayUse(consents, use, kind, today)) return null;
+  if (consents.length === 0) return 'nobody-asked';
+  return consents.some(({ state }) => isOpen(state)) ? 'no-answer' : 'not-agreed';
+}
+
 /** What a thing may be used for while nobody was asked about it. */
 export function amongItsOwn(kind: EntryKind | null): readonly ConsentUse[] {
   return kind === 'belief' ? OF_A_BELIEF : AMONG_ITS_OWN;

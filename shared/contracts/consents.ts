@@ -11,6 +11,7 @@ export const CONSENT_USES = [
   'print',
   'recording',
   'feed',
+  'open-page',
   'message',
   'radio',
   'training',

@@ -61,20 +61,22 @@ export const OPEN_WORDS = [
 ] as const satisfies readonly (keyof z.infer<typeof openEntry>)[];
 export type OpenWord = (typeof OPEN_WORDS)[number];
 
-/** Why something open does not stand on the page. */
-export const LEFT_OUT_REASONS = [
-  'nobody-asked',
-  'not-agreed',
-  'by-own-figure',
-  'name-in-title',
-  'name-in-words',
-] as const;
+/** What the page still waits for: a yes of those who gave the entry or the figure that it goes by, or the figure being open. */
+export const AWAITED_OF_OPEN_PAGE = ['nobody-asked', 'no-answer', 'not-agreed', 'not-open'] as const;
+
+const awaitedOfOpenPage = z.strictObject({
+  itemType: z.enum(['entry', 'figure']),
+  itemId: id,
+  what: z.enum(AWAITED_OF_OPEN_PAGE),
+});
+export type AwaitedOfOpenPage = z.infer<typeof awaitedOfOpenPage>;
 
 /** What the page leaves out of what is open in the newest published version, for whoever keeps the page. */
 export const leftOutOfOpenPage = z.strictObject({
   entryId: id,
   title: z.string(),
-  reason: z.enum(LEFT_OUT_REASONS),
+  /** Empty where it stands there, save some of its words. */
+  awaited: z.array(awaitedOfOpenPage),
   /** Where names were found, and whose; these words stay out, of a title the whole entry. */
   found: z.array(z.strictObject({ word: z.enum(OPEN_WORDS), names: z.array(z.string()) })),
 });
@@ -98,7 +100,7 @@ export const openPageEndpoints = {
     method: 'GET',
     path: '/api/communities/:communityId/open-page/left-out',
     summary:
-      'What is open and yet not on the page for everybody: nobody was asked, or a name was found in its words',
+      'What is open and yet not on the page for everybody: a yes is missing, or a name was found in its words',
     access: keepers,
     params,
     response: listOf(leftOutOfOpenPage),

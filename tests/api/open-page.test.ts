@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { ItemSharingEntity } from '#server/db/entities/item-sharing.entity.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { CONSENT_USES } from '#shared/contracts/consents.js';
 import type { LeftOutOfOpenPage, OpenPage, OpenPageState } from '#shared/contracts/open-page.js';
@@ -11,9 +12,10 @@ import {
   reasonOf,
   type Village,
 } from '#tests/support/calendar-api.js';
-import { addConsent } from '#tests/support/consent-api.js';
+import { addConsent, asked } from '#tests/support/consent-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { switchOpenPageOn } from '#tests/support/open-page-api.js';
+import { withdraw } from '#tests/support/withdrawal-api.js';
 
 /** A village's page for whoever has its address. */
 let api: TestApi;
@@ -21,6 +23,7 @@ let village: Village;
 let visitor: Client;
 let path: string;
 let openId: string;
+let figureId: string;
 const NAME = 'Wurrelkin';
 beforeAll(async () => {
   api = await openTestApi();
@@ -41,15 +44,24 @@ beforeAll(async () => {
   await addEntry(officer, calendarId, { titleOfficer: 'The village’s', sharingLevel: 'village' });
   await addEntry(elder, calendarId, { titleOfficer: 'Of the elders', sharingLevel: 'elders' });
   const figure = await addFigure(officer, { names: [{ tag: 'en', name: 'Our own bowl' }] });
-  await addEntry(officer, calendarId, {
+  figureId = figure.id;
+  const byFigure = await addEntry(officer, calendarId, {
     ...{ titleOfficer: 'By the village’s figure', sharingLevel: 'open' },
     lead: { type: 'marker', markerKey: figure.markerKey, phenomenon: 'heliacal-rising', occurrence: 1 },
   });
+  await addConsent(officer, 'entry', byFigure.id, { uses: [...CONSENT_USES] });
   const printed = await addEntry(officer, calendarId, {
-    titleOfficer: 'Only to be printed',
+    titleOfficer: 'Agreed to for all else',
     sharingLevel: 'open',
   });
-  await addConsent(officer, 'entry', printed.id, { uses: ['keep', 'show', 'print'] });
+  // What is ticked for feeds says nothing about the page.
+  const others = CONSENT_USES.filter((use) => use !== 'open-page');
+  await addConsent(officer, 'entry', printed.id, { uses: others });
+  const answering = await addEntry(officer, calendarId, {
+    titleOfficer: 'Still to be answered',
+    sharingLevel: 'open',
+  });
+  await addConsent(officer, 'entry', answering.id, asked());
   const named = await addEntry(officer, calendarId, {
     ...{ titleOfficer: 'Words with a name', sharingLevel: 'open', caution: 'Mind the dog' },
     otherSigns: `When ${village.officer.session.person?.displayName ?? ''} says so`,
@@ -125,16 +137,32 @@ describe('the page for everybody', () => {
     const list = async (client: Client) =>
       ((await client.get(`${path}/left-out`).expect(200)).body as { items: LeftOutOfOpenPage[] }).items;
     const name = village.officer.session.person?.displayName ?? '';
-    const seen = (await list(village.steward)).map(({ title, reason, found }) => [title, reason, found]);
+    const seen = (await list(village.steward)).map(({ title, awaited, found }) => [
+      ...[title, awaited.map(({ itemType, what }) => `${itemType} ${what}`), found],
+    ]);
     expect(seen).toEqual([
-      ['Nobody was asked', 'nobody-asked', []],
-      ['By the village’s figure', 'nobody-asked', []],
-      ['Only to be printed', 'not-agreed', []],
-      ['Words with a name', 'name-in-words', [{ word: 'otherSigns', names: [name] }]],
-      [`The field of ${NAME.toLowerCase()}`, 'name-in-title', [{ word: 'titleOfficer', names: [NAME] }]],
+      ['Nobody was asked', ['entry nobody-asked'], []],
+      ['By the village’s figure', ['figure not-open', 'figure nobody-asked'], []],
+      ['Agreed to for all else', ['entry not-agreed'], []],
+      ['Still to be answered', ['entry no-answer'], []],
+      ['Words with a name', [], [{ word: 'otherSigns', names: [name] }]],
+      [`The field of ${NAME.toLowerCase()}`, [], [{ word: 'titleOfficer', names: [NAME] }]],
     ]);
     expect(await list(village.officer)).toHaveLength(seen.length);
     expect(reasonOf(await village.elder.get(`${path}/left-out`))).toBe('403 not-allowed');
+  });
+
+  it('waits for the yes about the figure that an entry goes by, until nobody is left to be asked', async () => {
+    const key = await switchOpenPageOn(village.officer);
+    const titles = async () => (await page(key)).entries.map(({ titleOfficer }) => titleOfficer);
+    const sharing = api.dataSource.getRepository(ItemSharingEntity);
+    await sharing.update({ itemType: 'figure', itemId: figureId }, { level: 'open' });
+    expect(await titles()).not.toContain('By the village’s figure');
+    await addConsent(village.officer, 'figure', figureId, { uses: ['keep', 'show', 'feed', 'open-page'] });
+    expect(await titles()).toContain('By the village’s figure');
+    await withdraw(village.officer, 'figure', figureId, { askedById: village.elder.personId }).expect(204);
+    expect(await titles()).toContain('By the village’s figure');
+    expect((await read(key)).text).not.toContain('Our own bowl');
   });
 
   it('is drawn as a code, and slow to guess', async () => {

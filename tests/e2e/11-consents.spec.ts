@@ -53,7 +53,7 @@ test('an officer asks use by use, and the sheet goes by the tick for print', asy
   await page.getByLabel('Name, as they wish to be called').fill('Old Marrun');
   await page.getByRole('radio', { name: 'Yes', exact: true }).press(' ');
   const uses = page.getByRole('group', { name: 'What they said yes to' });
-  await expect(uses.getByRole('checkbox')).toHaveCount(12);
+  await expect(uses.getByRole('checkbox')).toHaveCount(13);
   await expect(uses.getByRole('checkbox', { checked: true })).toHaveCount(0);
   await expectNoSidewaysScroll(page);
   await expectAccessible(page);

@@ -25,6 +25,13 @@ const ASKED: Said = {
   mayWithdraw: [],
 };
 
+/** All that a village does with what is open, and the page that anybody can read. */
+const OPEN_TO_ALL: Said = {
+  ...ASKED,
+  uses: ['keep', 'show', 'print', 'recording', 'feed', 'open-page', 'message'],
+  afterDeath: 'keep',
+};
+
 /** What three givers of the demo agreed to; invented, like everything here. Days count from the asking. */
 export const TAZIMEL_CONSENTS: readonly {
   code: string;
@@ -32,12 +39,10 @@ export const TAZIMEL_CONSENTS: readonly {
   reviewInDays: number;
   said: Said;
 }[] = [
-  {
-    code: 'A01',
-    by: 'elder',
-    reviewInDays: 365,
-    said: { ...ASKED, uses: ['keep', 'show', 'print', 'recording', 'feed', 'message'], afterDeath: 'keep' },
-  },
+  { code: 'A01', by: 'elder', reviewInDays: 365, said: OPEN_TO_ALL },
+  { code: 'A02', by: 'elder2', reviewInDays: 365, said: OPEN_TO_ALL },
+  { code: 'A04', by: 'elder', reviewInDays: 365, said: OPEN_TO_ALL },
+  { code: 'A12', by: 'elder', reviewInDays: 365, said: OPEN_TO_ALL },
   {
     code: 'A03',
     by: 'elder2',

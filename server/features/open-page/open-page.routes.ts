@@ -4,16 +4,16 @@ import { FileReply } from '../../http/file-reply.js';
 import { feedLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
-import type { OpenPageService } from './open-page.service.js';
+import type { OpenPageServices } from './open-page-services.js';
 
-export function openPageRoutes(router: Router, mount: Mount, pages: OpenPageService): void {
+export function openPageRoutes(router: Router, mount: Mount, { pages, leftOut }: OpenPageServices): void {
   router.get(openPageEndpoints.read.path, ...feedLimits(), (_request, response, next) => {
     response.setHeader('X-Robots-Tag', 'noindex, nofollow');
     next();
   });
 
   mount.forMember(openPageEndpoints.state, (_call, actor) => pages.state(actor));
-  mount.forMember(openPageEndpoints.leftOut, async (_call, actor) => wholeList(await pages.leftOut(actor)));
+  mount.forMember(openPageEndpoints.leftOut, async (_call, actor) => wholeList(await leftOut.list(actor)));
   mount.forMember(openPageEndpoints.switchOn, ({ body }, actor) => pages.switchOn(actor, body.placeShown));
   mount.forMember(openPageEndpoints.switchOff, async (_call, actor) => {
     await pages.switchOff(actor);

@@ -1,6 +1,5 @@
 import {
   OPEN_PAGE_PATH,
-  type LeftOutOfOpenPage,
   type OpenPage,
   type OpenPageState,
   type PlaceShown,
@@ -8,26 +7,16 @@ import {
 import { randomBytes } from 'node:crypto';
 import QRCode from 'qrcode';
 import type { DataSource, EntityManager } from 'typeorm';
-import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { OpenPageEntity } from '../../db/entities/open-page.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
-import { consentsById } from '../../policy/consent.repository.js';
-import { figureIdOf } from '../../policy/entry-sight.js';
 import { recordAudit } from '../audit/audit.service.js';
-import { markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import { knownNames } from './known-names.service.js';
-import {
-  foundNames,
-  isTitle,
-  toOpenEntry,
-  toOpenPageState,
-  toOpenPlace,
-  withoutNames,
-} from './open-page.mapper.js';
+import { newestPublished } from './newest-published.service.js';
+import { toOpenEntry, toOpenPageState, toOpenPlace, withoutNames } from './open-page.mapper.js';
 
 const KEY_BYTES = 24;
 /** White around the code, in its own modules: readers need four. */
@@ -113,38 +102,6 @@ export class OpenPageService {
     };
   }
 
-  /** What is open and does not stand there, or not with all its words: so that nothing stays out in silence. */
-  async leftOut({ communityId }: Actor): Promise<LeftOutOfOpenPage[]> {
-    const { manager } = this.dataSource;
-    const newest = await newestPublished(manager, communityId);
-    if (newest === null) return [];
-    const { open, entries, givers } = await this.contents.readForEverybody(communityId, newest);
-    const known = await knownNames(manager, communityId, givers);
-    const agreed = new Set(entries.map(({ entryId }) => entryId));
-    const consentsOf = await consentsById(
-      manager,
-      'entry',
-      open.map(({ entryId }) => entryId),
-    );
-    return open.flatMap((entry): LeftOutOfOpenPage[] => {
-      const { entryId, content } = entry;
-      const about = { entryId, title: content.titleOfficer };
-      if (!agreed.has(entryId)) {
-        const reason =
-          consentsOf(entryId).length === 0
-            ? 'nobody-asked'
-            : figureIdOf(markerKeyOfLead(content.lead)) === null
-              ? 'not-agreed'
-              : 'by-own-figure';
-        return [{ ...about, reason, found: [] }];
-      }
-      const found = foundNames(toOpenEntry(entry), known);
-      if (found.length === 0) return [];
-      const isWhole = found.some(({ word }) => isTitle(word));
-      return [{ ...about, reason: isWhole ? 'name-in-title' : 'name-in-words', found }];
-    });
-  }
-
   private record(
     manager: EntityManager,
     facts: { communityId: string; actorId: string; action: 'open-page-on' | 'open-page-off' },
@@ -154,14 +111,4 @@ export class OpenPageService {
       ...{ at, ...facts, subjectType: 'community', subjectId: facts.communityId },
     });
   }
-}
-
-async function newestPublished(
-  manager: EntityManager,
-  communityId: string,
-): Promise<CalendarVersionEntity | null> {
-  return manager.findOne(CalendarVersionEntity, {
-    where: { state: 'published', calendar: { communityId } },
-    order: { publishedAt: 'DESC', id: 'ASC' },
-  });
 }

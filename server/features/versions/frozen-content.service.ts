@@ -22,7 +22,7 @@ import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { draftVariants } from '../variants/draft-variants.service.js';
 import { readDraft } from '../calendars/draft.service.js';
 import { withUsedFigures, type SkyDatesService } from '../calendars/sky-dates.service.js';
-import { entriesForUse } from '../../policy/consent-gate.js';
+import { awaitedFor, entriesForUse, type AwaitedYes } from '../../policy/consent-gate.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { viewerOf, villageDay } from '../../policy/viewer.js';
 import { checkSeal, leavesOf, newSalt } from './seal.service.js';
@@ -46,6 +46,12 @@ export interface CalendarContent {
   label: string | null;
   state: VersionState | null;
   hash: string | null;
+}
+
+/** What stands on the page for everybody, and what is open and waits for it. */
+export interface ContentForEverybody extends Pick<CalendarContent, 'header' | 'entries'> {
+  open: { entry: VersionEntryBody; byClosedFigure: boolean; awaited: AwaitedYes[] }[];
+  givers: string[];
 }
 
 /** A version as it was sealed. */
@@ -109,13 +115,10 @@ export class FrozenContentService {
   }
 
   /**
-   * What is open to whoever comes by, and may be handed on: nobody of the village has to ask for it. Beside it all that is
-   * open by itself, for those who keep the page, and how the givers of the whole version are called, so that no word tells of them.
+   * What is open to whoever comes by, and was agreed to for the page for everybody. Beside it all that is open by itself,
+   * with what it waits for, and how the givers of the whole version are called, so that no word tells of them.
    */
-  async readForEverybody(
-    communityId: string,
-    version: CalendarVersionEntity,
-  ): Promise<CalendarContent & { open: VersionEntryBody[]; givers: string[] }> {
+  async readForEverybody(communityId: string, version: CalendarVersionEntity): Promise<ContentForEverybody> {
     const { manager } = this.dataSource;
     const today = await villageDay(manager, communityId, this.clock.now());
     const passerBy = { personId: '', communityId, roles: [], groupIds: new Set<string>(), today };
@@ -123,16 +126,21 @@ export class FrozenContentService {
     const seen = await seenOfVersion(manager, passerBy, version, frozen.header, frozen.entries);
     const shown = await entriesForVillage(manager, passerBy, seen.entries.map(bodyOf));
     const sight = await entrySight(manager, passerBy, shown.map(thingOf));
-    const open = shown.filter((entry) => sight.isOpen(thingOf(entry)));
-    const entries = await entriesForUse(manager, today, 'feed', open, true);
-    const { number, label, state, hash } = version;
-    const { header } = cutHeader(seen.header, entries);
+    const ownOpen = shown.filter(({ entryId }) => sight.sharedOf(entryId)?.level === 'open');
+    const awaitedOf = await awaitedFor(manager, today, 'open-page', ownOpen);
+    const open = ownOpen.map((entry) => ({
+      entry,
+      byClosedFigure: !sight.isOpen(thingOf(entry)),
+      awaited: awaitedOf(entry),
+    }));
+    const entries = open
+      .filter(({ byClosedFigure, awaited }) => !byClosedFigure && awaited.length === 0)
+      .map(({ entry }) => entry);
     const givers = frozen.entries.flatMap(({ content, variants = [] }) => [
       content.giver,
       ...variants.map(({ content: { giver } }) => giver),
     ]);
-    const ownOpen = shown.filter(({ entryId }) => sight.sharedOf(entryId)?.level === 'open');
-    return { header, entries, number, label, state, hash, open: ownOpen, givers };
+    return { header: cutHeader(seen.header, entries).header, entries, open, givers };
   }
 
   private async draft(manager: EntityManager, actor: Actor, calendarId: string): Promise<CalendarContent> {

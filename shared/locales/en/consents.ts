@@ -181,6 +181,11 @@ export const texts = {
       name: 'Put it into calendars on telephones',
       why: 'Those who subscribe get its days by themselves.',
     },
+    'open-page': {
+      short: 'page for everybody',
+      name: 'Put it on the page for everybody',
+      why: 'Anybody with its address reads it, also far away, without anybody’s name. What they copied stays with them.',
+    },
     message: {
       short: 'messages',
       name: 'Send it by text or voice message',

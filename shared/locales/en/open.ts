@@ -32,7 +32,7 @@ export const texts = {
   foot: 'A page that the village opened itself, with what it shares with everybody. It is not for search engines.',
   board: {
     title: 'A page for everybody',
-    what: 'What is open of the newest published calendar, and was agreed to for calendars on telephones, for whoever has the address. Nobody asked is a no. People’s names are looked for in its words, and words with one stay out. It is off until you switch it on.',
+    what: 'What is open of the newest published calendar, and was agreed to for this page, for whoever has the address. Nobody asked is a no. People’s names are looked for in its words, and words with one stay out. It is off until you switch it on.',
     isOff: 'It is off.',
     isOn: 'It is on.',
     placeShown: 'How much of the place it tells',
@@ -58,13 +58,25 @@ export const texts = {
       title: 'What is open and stays out',
       none: 'Nothing: all that is open in the newest published calendar stands on the page.',
       what: 'As it is today, also while the page is off.',
-      'nobody-asked': 'Nobody was asked about these:',
-      'not-agreed': 'For calendars on telephones these have no yes, or it has ended:',
-      'by-own-figure':
-        'The village’s own figure that these go by is not open, or one of the two has no yes for calendars on telephones:',
-      'name-in-title': 'A name of somebody stands in the title of these, so all of each stays out:',
-      'name-in-words': 'Only these words stay out, because a name of somebody stands in them:',
+      how: 'To ask, open one of these and choose “{{write}}”. Say that anybody can read the page, and tick “{{use}}” only if they say yes to that. Then it stands there at once.',
+      entry: {
+        'nobody-asked': 'Nobody was asked about these:',
+        'no-answer': 'Somebody was asked about these, and an answer is still to come:',
+        'not-agreed':
+          'These have a yes to other uses and none to this page. A yes to calendars on telephones does not count for it:',
+      },
+      figure: {
+        'not-open': 'These go by a figure of the village that is not open itself:',
+        'nobody-asked': 'These go by a figure of the village that nobody was asked about:',
+        'no-answer': 'These go by a figure of the village for which an answer is still to come:',
+        'not-agreed': 'These go by a figure of the village that has no yes to this page:',
+      },
       ask: 'Ask about “{{title}}”',
+      askFigure: 'Ask about the figure of {{titles}}',
+      seeFigure: 'See the figure of {{titles}}',
+      quoted: '“{{title}}”',
+      names:
+        'A name of somebody stands in the words of these. Such words stay out, and with a title the whole entry:',
       found: '{{word}}: {{names}}',
       rewrite: 'Write it without the name in the draft; the page follows with the next version.',
       word: {

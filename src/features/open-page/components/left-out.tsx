@@ -1,17 +1,20 @@
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
-import { LEFT_OUT_REASONS, type LeftOutOfOpenPage } from '#shared/contracts/open-page.js';
+import type { LeftOutOfOpenPage } from '#shared/contracts/open-page.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { leftOutQuery } from '../api/open-page-api.js';
+import { awaitedGroups, type AwaitedGroup } from '../model/awaited-groups.js';
 
 /** What is open and does not stand on the page for everybody, why, and what can be done about it. */
 export function LeftOut({ communityId }: { communityId: string }) {
-  const { t } = useTranslation('open');
+  const { t } = useTranslation(['open', 'consents']);
   const words = useProblemWords();
   const { data, error, refetch } = useQuery(leftOutQuery(communityId));
+  const groups = awaitedGroups(data ?? []);
+  const named = data?.filter(({ found }) => found.length > 0) ?? [];
   return (
     <section className="grid gap-2">
       <h3>{t('board.leftOut.title')}</h3>
@@ -23,37 +26,57 @@ export function LeftOut({ communityId }: { communityId: string }) {
       {data && data.length > 0 && (
         <>
           <p className="text-small">{t('board.leftOut.what')}</p>
-          {LEFT_OUT_REASONS.map((reason) => (
-            <Things key={reason} reason={reason} things={data.filter((thing) => thing.reason === reason)} />
+          {groups.length > 0 && (
+            <p className="text-small">
+              {t('board.leftOut.how', {
+                write: t('consents:sheet.ask'),
+                use: t('consents:use.open-page.name'),
+              })}
+            </p>
+          )}
+          {groups.map((group) => (
+            <Awaited key={`${group.itemType} ${group.what}`} {...group} />
           ))}
+          {named.length > 0 && (
+            <div className="border-t border-hairline pt-3">
+              <p>{t('board.leftOut.names')}</p>
+              <ul className="mt-1 grid gap-1">
+                {named.map(({ entryId, title, found }) => (
+                  <li key={entryId}>
+                    <NamesFound title={title} found={found} />
+                  </li>
+                ))}
+              </ul>
+            </div>
+          )}
         </>
       )}
     </section>
   );
 }
 
-interface ThingsProps {
-  reason: LeftOutOfOpenPage['reason'];
-  things: readonly LeftOutOfOpenPage[];
-}
-
-/** The reason once, then each with the way to ask, or with the names that were found. */
-function Things({ reason, things }: ThingsProps) {
-  const { t } = useTranslation('open');
-  if (things.length === 0) return null;
+/** What is missing, once, then each thing with the way to it. */
+function Awaited({ itemType, what, things }: AwaitedGroup) {
+  const { t, i18n } = useTranslation('open');
+  const list = new Intl.ListFormat(i18n.language);
+  const isToAsk = what !== 'not-open';
+  const label = itemType === 'entry' ? null : isToAsk ? 'board.leftOut.askFigure' : 'board.leftOut.seeFigure';
   return (
     <div className="border-t border-hairline pt-3">
-      <p>{t(`board.leftOut.${reason}`)}</p>
+      <p>{itemType === 'entry' ? t(`board.leftOut.entry.${what}`) : t(`board.leftOut.figure.${what}`)}</p>
       <ul className="mt-1 grid gap-1">
-        {things.map(({ entryId, title, found }) => (
-          <li key={entryId}>
-            {found.length > 0 ? (
-              <NamesFound title={title} found={found} />
-            ) : (
-              <ButtonLink look="quiet" to={paths.itemConsents('entry', entryId)}>
-                {t('board.leftOut.ask', { title })}
-              </ButtonLink>
-            )}
+        {things.map(({ itemId, titles }) => (
+          <li key={itemId}>
+            <ButtonLink
+              look="quiet"
+              to={isToAsk ? paths.itemConsents(itemType, itemId) : paths.figure(itemId)}
+            >
+              {label === null
+                ? t('board.leftOut.ask', { title: titles[0] ?? '' })
+                : t(label, {
+                    titles: list.format(titles.map((title) => t('board.leftOut.quoted', { title }))),
+                  })}
+            </ButtonLink>
           </li>
         ))}
       </ul>

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { isDue, mayUse, shownUntil, stateOn, type ConsentFact } from '#server/policy/consents.js';
+import { isDue, mayUse, missingYes, shownUntil, stateOn, type ConsentFact } from '#server/policy/consents.js';
 import { CONSENT_USES } from '#shared/contracts/consents.js';
 
 const DAY = '2027-06-10';
@@ -45,6 +45,22 @@ describe('what a thing may be used for', () => {
     const allowed = (kind: 'farm' | 'belief') => CONSENT_USES.filter((use) => mayUse([], use, kind, DAY));
     expect(allowed('farm')).toEqual(['keep', 'show', 'print', 'recording', 'feed', 'message']);
     expect(allowed('belief')).toEqual(['keep', 'show', 'recording']);
+  });
+});
+
+describe('which yes is missing', () => {
+  const missing = (consents: ConsentFact[]) => missingYes(consents, 'open-page', 'farm', DAY);
+
+  it('is none only where that use is ticked', () => {
+    expect(missing([fact({ uses: ['keep', 'show', 'open-page'] })])).toBeNull();
+    expect(missing([fact({ uses: CONSENT_USES.filter((use) => use !== 'open-page') })])).toBe('not-agreed');
+  });
+
+  it('is told apart from nobody asked, and from an answer that is still to come', () => {
+    expect(missing([])).toBe('nobody-asked');
+    for (const state of ['asked', 'not-now'] as const) {
+      expect(missing([fact({ uses: ['open-page'] }), fact({ state, uses: [] })])).toBe('no-answer');
+    }
   });
 });
 
