@@ -13,6 +13,7 @@ export interface RouteHandle {
 }
 
 export function createRouter(queryClient: QueryClient): ReturnType<typeof createBrowserRouter> {
+  const toRoute = (route: AppRoute) => routeOf(queryClient, route);
   return createBrowserRouter([
     {
       // Asked while the page's own code is still on its way; a failure shows where the session is used.
@@ -39,11 +40,19 @@ export function createRouter(queryClient: QueryClient): ReturnType<typeof create
   ]);
 }
 
-function toRoute({ path, texts, load, rail = true }: AppRoute): RouteObject {
+function routeOf(client: QueryClient, { path, texts, load, askEarly, rail = true }: AppRoute): RouteObject {
   const handle: RouteHandle = { rail };
   return {
     path,
     handle,
+    // A failure shows where the answer is used.
+    ...(askEarly && {
+      loader: ({ params }) => {
+        askEarly(client, params).catch(() => undefined);
+        return null;
+      },
+      shouldRevalidate: ({ currentUrl, nextUrl }) => currentUrl.pathname !== nextUrl.pathname,
+    }),
     errorElement: <ErrorPage />,
     lazy: async () => {
       const [screen] = await Promise.all([load(), loadNamespaces(...texts)]);

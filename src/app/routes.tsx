@@ -1,4 +1,6 @@
+import type { QueryClient } from '@tanstack/react-query';
 import type { ComponentType } from 'react';
+import type { Params } from 'react-router-dom';
 import type { Namespace } from '#shared/locales/index.js';
 import { PATTERNS } from '#src/lib/paths.js';
 
@@ -8,6 +10,8 @@ export interface AppRoute {
   /** Text files the screen reads besides `common` and `problems`. */
   texts: readonly Namespace[];
   load: () => Promise<{ Component: ComponentType }>;
+  /** Begins to read what the screen shows first, while its code is fetched. */
+  askEarly?: (client: QueryClient, params: Params) => Promise<void>;
   /** False for a screen that needs the whole height: no rail. */
   rail?: boolean;
 }
@@ -105,6 +109,10 @@ export const villageRoutes: readonly AppRoute[] = [
     path: PATTERNS.calendar,
     texts: ['calendars', 'versions', 'season', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
     load: () => import('./routes/calendar.js'),
+    askEarly: async (client, { calendarId = '' }) => {
+      const { askEarly } = await import('#src/features/calendars/api/ask-early.js');
+      await askEarly(client, calendarId);
+    },
   },
   {
     path: PATTERNS.versions,
