@@ -12,11 +12,14 @@
  * - `month-day`: `MM-DD`, a day of every year
  * - `yes-no`: `yes` or `no`
  * - `json`: a lead that has no columns of its own, as canonical JSON
+ * - `parts`: lines of parts with bars between (`shared/kernel/cell-parts.ts`): signs as kind, name, what to look for, where,
+ *   usual from, usual to, still seen; an office's check as name, office, day
  *
  * An empty cell says nothing. `given` columns make an entry when they are read back; `computed` ones are what the engine
  * made of it, `about` ones say where the file comes from: both are passed over.
  */
-export type CsvColumnKind = 'text' | 'code' | 'whole-number' | 'iso-date' | 'month-day' | 'yes-no' | 'json';
+export type CsvColumnKind =
+  'text' | 'code' | 'whole-number' | 'iso-date' | 'month-day' | 'yes-no' | 'json' | 'parts';
 export type CsvColumnPart = 'given' | 'computed' | 'about';
 
 export interface CsvColumn {
@@ -63,6 +66,40 @@ export const CALENDAR_CSV_COLUMNS = [
   column('protectiveWatch', 'yes-no'),
   column('otherSigns', 'text'),
   column('ifLate', 'text'),
+  column('operation', 'code'),
+  column('ownOperation', 'text'),
+  column('variety', 'text'),
+  column('varietyFromDays', 'whole-number'),
+  column('varietyToDays', 'whole-number'),
+  column('land', 'text'),
+  column('readyDays', 'whole-number'),
+  column('graceDays', 'whole-number'),
+  column('repeats', 'code'),
+  column('everyYears', 'whole-number'),
+  column('repeatRule', 'text'),
+  column('signs', 'parts'),
+  column('signsNeeded', 'whole-number'),
+  column('mustHaveSign', 'whole-number'),
+  column('responsible', 'text'),
+  column('helpers', 'text'),
+  column('decides', 'text'),
+  column('owns', 'text'),
+  column('inputs', 'text'),
+  column('ifEarly', 'text'),
+  column('ifLaterStill', 'text'),
+  column('stopDate', 'month-day'),
+  column('stopSource', 'text'),
+  column('askWhom', 'text'),
+  column('confidence', 'code'),
+  column('confidenceBy', 'text'),
+  column('basis', 'code'),
+  column('sinceYear', 'whole-number'),
+  column('heardWhere', 'text'),
+  column('heardDay', 'iso-date'),
+  column('heardLanguage', 'text'),
+  column('checkedWork', 'parts'),
+  column('checkedSafety', 'parts'),
+  column('checkedLate', 'parts'),
   column('caution', 'text'),
   column('notes', 'text'),
   column('giver', 'text'),

@@ -50,6 +50,40 @@ export const IMPORT_COLUMNS = [
   'protectiveWatch',
   'otherSigns',
   'ifLate',
+  'operation',
+  'ownOperation',
+  'variety',
+  'varietyFromDays',
+  'varietyToDays',
+  'land',
+  'readyDays',
+  'graceDays',
+  'repeats',
+  'everyYears',
+  'repeatRule',
+  'signs',
+  'signsNeeded',
+  'mustHaveSign',
+  'responsible',
+  'helpers',
+  'decides',
+  'owns',
+  'inputs',
+  'ifEarly',
+  'ifLaterStill',
+  'stopDate',
+  'stopSource',
+  'askWhom',
+  'confidence',
+  'confidenceBy',
+  'basis',
+  'sinceYear',
+  'heardWhere',
+  'heardDay',
+  'heardLanguage',
+  'checkedWork',
+  'checkedSafety',
+  'checkedLate',
   'caution',
   'notes',
   'giver',
@@ -64,7 +98,8 @@ export const IMPORT_COLUMNS = [
 export type ImportColumn = (typeof IMPORT_COLUMNS)[number];
 
 export const IMPORT_LINES_MAX = 500;
-const CELL_MAX = 4000;
+/** As long as all signs of an entry are together, each letter of them marked. */
+const CELL_MAX = 14_000;
 
 export const tableLine = z.strictObject({
   /** As the spreadsheet counts it, for whoever has to put something right there. */

@@ -1,6 +1,5 @@
 import { CALENDAR_CSV_COLUMNS, type CalendarCsvColumn } from '#shared/calendar/csv-columns.js';
 import type { EntryDates, EntryLead } from '#shared/contracts/calendars.js';
-import type { MonthDay } from '#shared/contracts/common.js';
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { SeenVariant, VersionEntryBody } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
@@ -8,6 +7,7 @@ import { csvText, type CsvCell } from '#shared/kernel/csv.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
 import type { CalendarContent } from '../versions/frozen-content.service.js';
+import { monthDay, recordCells } from './record-cells.js';
 
 /** Spreadsheets read village names rightly only after this mark. */
 const UTF8_MARK = '\ufeff';
@@ -65,6 +65,7 @@ function entryLine({ entryId, content, dates }: VersionEntryBody, facts: Facts):
     lastDate: content.lastDate && monthDay(content.lastDate.date),
     lastDateSource: content.lastDate && content.lastDate.source,
     protectiveWatch: content.protectiveWatch ? 'yes' : 'no',
+    ...(content.record && recordCells(content.record)),
     giver: giverCell(content.giver, facts.t),
     ...(board && {
       ...{ boardShows: board.shows, boardReason: board.reason },
@@ -147,8 +148,4 @@ function leadCells(lead: EntryLead, numberOf: Facts['numberOf']): Partial<Line> 
 
 function giverCell(giver: string, t: Translate): string {
   return giver === GIVER_BY_ROLE ? t('sheet.byRole') : giver;
-}
-
-function monthDay({ month, day }: MonthDay): string {
-  return [month, day].map((part) => String(part).padStart(2, '0')).join('-');
 }

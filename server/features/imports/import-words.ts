@@ -2,12 +2,14 @@ import { WELL_KNOWN_KEYS, allMarkerKeys, markerNamesOf } from '../stars/marker-n
 import { plainWords, type ImportWords } from '#shared/calendar/import-dates.js';
 import { phrasesOf, type PhraseTree } from '#shared/calendar/import-phrases.js';
 import { ENTRY_KINDS, type EntryKind } from '#shared/contracts/calendars.js';
+import { OPERATIONS, type Operation } from '#shared/contracts/event-record.js';
 import type { VillageWord } from '#shared/contracts/village-word.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import { resources } from '#shared/locales/index.js';
 import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
 import { PHENOMENA, type Phenomenon } from '#shared/sky/index.js';
 import type { KnownWords } from '../word-lists/known-words.service.js';
+import { namesOf, tableCodes, type CodeWords, type TableCodes } from './code-words.js';
 
 /** Of one language, what its files say by which a table may be written. */
 export interface ImportLocale {
@@ -19,7 +21,10 @@ export interface ImportLocale {
     phrases: PhraseTree;
     kinds: Readonly<Record<EntryKind, string>>;
     yes: string;
+    codes: CodeWords;
   };
+  /** Names that the product itself gives to codes. */
+  codeNames: CodeWords;
   kindNames: Readonly<Record<EntryKind, string>>;
   phenomenonNames: Readonly<Record<Phenomenon, string>>;
   /** Names that the product itself gives to signs of the sky. */
@@ -31,6 +36,7 @@ export interface TableWords {
   dates: ImportWords;
   kinds: ReadonlyMap<string, EntryKind>;
   yes: ReadonlySet<string>;
+  codes: TableCodes;
   /** Figures that the product knows, by what people call them. */
   figures: ReadonlyMap<string, string>;
 }
@@ -57,6 +63,7 @@ export function tableWordsOf(locales: readonly ImportLocale[]): TableWords {
         ),
       ),
     ]),
+    codes: tableCodes(locales.flatMap(({ words, codeNames }) => [codeNames, words.codes])),
     yes: new Set(locales.flatMap(({ words }) => namesOf(words.yes))),
     figures: new Map(
       locales.flatMap(({ words }) =>
@@ -71,9 +78,17 @@ export function tableWordsOf(locales: readonly ImportLocale[]): TableWords {
 /** Of the languages that are there. */
 export const TABLE_WORDS = tableWordsOf(
   LANGUAGES.map((language) => {
-    const { imports, calendars, sky } = resources[language];
+    const { imports, calendars, record, sky } = resources[language];
     return {
       words: imports.words,
+      codeNames: {
+        operations: record.operation,
+        repeats: record.repeats,
+        confidences: record.confidence,
+        bases: record.basis,
+        signTypes: record.signs.type,
+        stillSeen: record.signs.stillSeen,
+      },
       kindNames: calendars.kind,
       phenomenonNames: sky.phenomenon,
       signNames: sky.sign,
@@ -89,13 +104,31 @@ export type VillageKinds = ReadonlyMap<string, { kind: EntryKind; kindWord: Vill
 
 export function villageKinds({ kinds }: KnownWords): VillageKinds {
   return new Map(
-    [...kinds.values()].flatMap(({ key, like, word }) => {
-      const kind = ENTRY_KINDS.find((each) => each === like);
-      if (word === '' || kind === undefined) return [];
-      const kindWord = key === like ? { word } : { id: key, word };
-      return [[plainWords(word), { kind, kindWord }] as const];
-    }),
+    villageWords(kinds, ENTRY_KINDS).map(({ name, code, word }) => [name, { kind: code, kindWord: word }]),
   );
+}
+
+/** What a village calls kinds of work, by plain words. */
+export type VillageOperations = ReadonlyMap<string, { operation: Operation; operationWord: VillageWord }>;
+
+export function villageOperations({ operations }: KnownWords): VillageOperations {
+  return new Map(
+    villageWords(operations, OPERATIONS).map(({ name, code, word }) => [
+      name,
+      { operation: code, operationWord: word },
+    ]),
+  );
+}
+
+function villageWords<C extends string>(
+  words: KnownWords['kinds'],
+  codes: readonly C[],
+): { name: string; code: C; word: VillageWord }[] {
+  return [...words.values()].flatMap(({ key, like, word }) => {
+    const code = codes.find((each) => each === like);
+    if (word === '' || code === undefined) return [];
+    return [{ name: plainWords(word), code, word: key === like ? { word } : { id: key, word } }];
+  });
 }
 
 /** Stars and figures by every name that the village has for them; its own figures come before all others. */
@@ -123,11 +156,4 @@ export function markerKeysByName(
 
 function byWord<K extends string, V>(words: readonly K[], valueOf: (word: K) => V): Record<K, V> {
   return Object.fromEntries(words.map((word) => [word, valueOf(word)])) as Record<K, V>;
-}
-
-function namesOf(list: string): string[] {
-  return list
-    .split(',')
-    .map((name) => plainWords(name))
-    .filter((name) => name !== '');
 }

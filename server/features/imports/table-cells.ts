@@ -2,13 +2,18 @@ import { dateCell, type ImportDateFacts } from '#shared/calendar/import-dates.js
 import type { NamedSign } from '#shared/calendar/import-signs.js';
 import type { EntryLead, EntryOffsets } from '#shared/contracts/calendars.js';
 import type { MonthDay } from '#shared/contracts/common.js';
+import type { RecordSign } from '#shared/contracts/event-record.js';
 import type { ImportColumn, ReadLine, TableLine } from '#shared/contracts/imports.js';
-import { DAY_SOURCE, type TableWords, type VillageKinds } from './import-words.js';
+import { dayNumberOf, daysInMonth, isoDateOf } from '#shared/kernel/iso-date.js';
+import { DAY_SOURCE, type TableWords, type VillageKinds, type VillageOperations } from './import-words.js';
 
 /** All that lines are read by. */
-export interface TableFacts extends ImportDateFacts, Pick<TableWords, 'kinds' | 'yes'> {
+export interface TableFacts extends ImportDateFacts, Pick<TableWords, 'kinds' | 'yes' | 'codes'> {
   /** They come before the words of every language. */
   villageKinds: VillageKinds;
+  villageOperations: VillageOperations;
+  /** Signs of the village's list that everybody sees, by their names as `plainWords` writes them. */
+  listedSigns: ReadonlyMap<string, RecordSign>;
 }
 export type LineProblem = ReadLine['problems'][number];
 export type Cells = TableLine['cells'];
@@ -41,4 +46,27 @@ export function fixedDay(
   if (read.kind === 'empty') return { date: null, problem: null };
   if (read.kind === 'day') return { date: read[end], problem: null };
   return { date: null, problem: read.kind === 'problem' ? read.problem : 'date-not-read' };
+}
+
+const ISO = /^(\d{4})-(\d{2})-(\d{2})$/u;
+const YEAR = /(?<!\d)\d{4}(?!\d)/u;
+
+/** A day that was, with its year. */
+export function pastDay(
+  text: string,
+  facts: ImportDateFacts,
+): { day: string | null; problem: 'not-a-past-day' | null } {
+  if (text === '') return { day: null, problem: null };
+  const [year = 0, month = 0, day = 0] = ISO.exec(text)?.slice(1).map(Number) ?? dayInWords(text, facts);
+  const isThere = month >= 1 && month <= 12 && day >= 1 && day <= daysInMonth(year, month);
+  if (!isThere) return { day: null, problem: 'not-a-past-day' };
+  return { day: isoDateOf(dayNumberOf(year, month, day)), problem: null };
+}
+
+function dayInWords(text: string, facts: ImportDateFacts): number[] {
+  const said = YEAR.exec(text)?.[0];
+  if (said === undefined) return [];
+  const read = dateCell(text, { ...facts, calendarYear: Number(said) });
+  if (read.kind !== 'day' || read.year === null) return [];
+  return [read.year, read.first.month, read.first.day];
 }

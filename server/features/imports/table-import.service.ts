@@ -17,11 +17,11 @@ import { readDraft, type Draft } from '../calendars/draft.service.js';
 import { knowsMarker, markerKeyOfLead, type SkyDatesService } from '../calendars/sky-dates.service.js';
 import { figureKeysByName, figuresSeenBy } from '../figures/village-figures.service.js';
 import { knownWords } from '../word-lists/known-words.service.js';
-import { markerKeysByName, TABLE_WORDS, villageKinds } from './import-words.js';
+import { markerKeysByName, TABLE_WORDS, villageKinds, villageOperations } from './import-words.js';
 import { landOnce, type LandingEntry } from './landing.service.js';
 import type { TableFacts } from './table-cells.js';
 import { tablePlan, type DraftTitle, type PlannedLine } from './table-plan.js';
-import { natureSignsOf } from './village-signs.service.js';
+import { villageSignsOf } from './village-signs.service.js';
 
 interface Read {
   lines: ReadLine[];
@@ -67,14 +67,20 @@ export class TableImportService {
     const viewer = await viewerOf(manager, actor, this.clock.now());
     const figures = await figuresSeenBy(manager, viewer);
     const draft = await readDraft(manager, this.sky, calendar);
+    const ownWords = await knownWords(manager, actor.communityId);
+    const listedSigns = await villageSignsOf(manager, viewer);
     const facts: TableFacts = {
-      ...{ kinds: TABLE_WORDS.kinds, yes: TABLE_WORDS.yes },
-      villageKinds: villageKinds(await knownWords(manager, actor.communityId)),
+      ...{ kinds: TABLE_WORDS.kinds, yes: TABLE_WORDS.yes, codes: TABLE_WORDS.codes },
+      ...{
+        villageKinds: villageKinds(ownWords),
+        villageOperations: villageOperations(ownWords),
+        listedSigns,
+      },
       ...{ words: TABLE_WORDS.dates, dayOrder, calendarYear: calendar.year },
       markerKeyOf: markerKeysByName(figures, await figureKeysByName(manager, viewer)),
       latitudeDeg: draft.place.latitudeDeg,
       natureSigns: new Map([
-        ...(await natureSignsOf(manager, viewer)),
+        ...[...listedSigns].map(([plain, { name }]) => [plain, name] as const),
         ...natureSigns.map((name) => [plainWords(name), name.trim()] as const),
       ]),
     };

@@ -20,6 +20,7 @@ import {
   type LineProblem,
   type TableFacts,
 } from './table-cells.js';
+import { recordColumn, recordOfLine } from './table-record.js';
 import { timingOf } from './table-timing.js';
 
 export interface LineEntry {
@@ -35,8 +36,10 @@ export function entryOfLine(cells: Cells, facts: TableFacts): LineEntry {
   const timing = timingOf(cells, facts);
   const { kind, kindWord } = kindOf(plainWords(cell('kind')), facts);
   const lastDate = fixedDay(cell('lastDate'), facts);
+  const { record, problems: recordProblems } = recordOfLine(cells, facts);
   const problems = [
     ...timing.problems,
+    ...recordProblems,
     ...(kind === null ? [{ column: 'kind' as const, code: 'unknown-kind' }] : []),
     ...(lastDate.problem === null ? [] : [{ column: 'lastDate' as const, code: lastDate.problem }]),
   ];
@@ -59,6 +62,7 @@ export function entryOfLine(cells: Cells, facts: TableFacts): LineEntry {
     giver: cell('giver'),
     agreedToPrint: false,
     sharingLevel: levelOf(kind ?? 'farm'),
+    ...(record && { record }),
   } satisfies Record<
     keyof Omit<EntryInput, 'giverId' | 'board' | 'sharing' | 'record' | 'kindWord'>,
     unknown
@@ -87,6 +91,7 @@ export function lineProblems(issues: Parameters<typeof fieldErrors>[0], cells: C
 
 function columnOf(field: string, cells: Cells): ImportColumn {
   const [head = '', member = ''] = field.split('.');
+  if (head === 'record') return recordColumn(field.slice('record.'.length));
   if (head === 'offsets') {
     const day = WINDOW_DAYS.find((each) => `${each}Days` === member) ?? 'bestFrom';
     return cellOf(cells, `${day}Days`) === '' && cellOf(cells, day) !== '' ? day : `${day}Days`;

@@ -1,5 +1,6 @@
 import { plainWords } from '#shared/calendar/import-dates.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
+import type { RecordSign } from '#shared/contracts/event-record.js';
 import { In, IsNull, type EntityManager } from 'typeorm';
 import { SignEntity } from '../../db/entities/sign.entity.js';
 import { isForVillage } from '../../policy/policy.js';
@@ -9,10 +10,10 @@ import type { Viewer } from '../../policy/viewer.js';
 import { withListedSigns } from '../signs/entry-signs.service.js';
 
 /** Signs of the village's list that everybody sees, by their names as tables are compared. */
-export async function natureSignsOf(
+export async function villageSignsOf(
   manager: EntityManager,
   { communityId, today }: Viewer,
-): Promise<Map<string, string>> {
+): Promise<Map<string, RecordSign>> {
   const rows = await manager.findBy(SignEntity, { communityId, takenOutAt: IsNull() });
   const shared = await sharedById(
     manager,
@@ -22,7 +23,7 @@ export async function natureSignsOf(
   return new Map(
     rows
       .filter(({ id }) => isForVillage(shared.get(id), today))
-      .map(({ words: { name } }) => [plainWords(name), name] as const),
+      .map(({ id, words }) => [plainWords(words.name), { ...words, sharedId: id }] as const),
   );
 }
 

@@ -267,6 +267,23 @@ export const texts = {
     'mixed-dates': 'This line names two signs. Let all its days go by one of them.',
     'days-missing': 'Say how many days after the sign the best days begin; a minus means before it.',
     'unknown-kind': 'This kind is not known. Use one such as farm, household, community, belief or safety.',
+    'unknown-operation':
+      'This kind of work is not known. Use one such as sow, weed, harvest or store; or leave it empty and say it under “kind of work in own words”.',
+    'unknown-repeats': 'Write “every year”, “every so many years” or “only in some years”.',
+    'unknown-confidence': 'Write “sure”, “fairly sure”, “not so sure” or “being tried”.',
+    'unknown-basis': 'Write “handed down”, “own years”, “written records” or “a trial”.',
+    'sign-parts':
+      'Write each sign on a line of its own with bars between: kind | name | what to look for | where | usual from | usual to | still seen. Kind and name are enough.',
+    'unknown-sign-kind':
+      'Begin each sign with its kind: bird, plant, insect, animal, wind, cloud, water, soil, ice, stars, Moon or people.',
+    'unknown-still-seen':
+      'As the last part of a sign write “still seen”, “seldom seen now” or “not seen any more”.',
+    'which-sign': 'This line names no such sign. Give the number of one of its signs, or its name.',
+    'stop-needs-source': 'Say who set the day on which to stop, too.',
+    'stop-needs-date': 'Say on which day to stop, or leave out who set it.',
+    'check-parts': 'Write who read it, the office and the day with bars between: name | office | 2027-03-01.',
+    'not-a-past-day':
+      'This is not read as a day with its year. Write it as 2027-03-01, 1.3.2027 or 1 March 2027.',
     'which-entry':
       'This does not say which work it is counted from. Name one line by its number or its whole title, such as “actual date of A04”.',
     'which-season':

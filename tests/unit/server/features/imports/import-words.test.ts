@@ -51,13 +51,20 @@ const WORDS: ImportLocale = {
     },
     kinds: { ...en.imports.words.kinds, farm: 'fel', household: 'hus' },
     yes: 'si',
+    codes: { operations: { sow: 'sarol' } },
   },
+  codeNames: {},
   kindNames: en.calendars.kind,
   phenomenonNames: en.sky.phenomenon,
   signNames: {},
 };
 const ENGLISH: ImportLocale = {
   words: en.imports.words,
+  codeNames: {
+    repeats: en.record.repeats,
+    confidences: en.record.confidence,
+    bases: en.record.basis,
+  },
   kindNames: en.calendars.kind,
   phenomenonNames: en.sky.phenomenon,
   signNames: en.sky.sign,
@@ -65,10 +72,15 @@ const ENGLISH: ImportLocale = {
 
 const words = tableWordsOf([WORDS, ENGLISH]);
 const facts: TableFacts = {
-  ...{ kinds: words.kinds, yes: words.yes, words: words.dates },
+  ...{ kinds: words.kinds, yes: words.yes, codes: words.codes, words: words.dates },
   ...{ dayOrder: null, calendarYear: 2027, latitudeDeg: 12 },
   markerKeyOf: new Map([...markerKeysByName([], new Map()), ...words.figures]),
-  ...{ natureSigns: new Map(), villageKinds: new Map() },
+  ...{
+    natureSigns: new Map(),
+    villageKinds: new Map(),
+    villageOperations: new Map(),
+    listedSigns: new Map(),
+  },
 };
 const planOf = (languages: readonly ColumnTexts[], text: string) => {
   const table = readTable(text);
