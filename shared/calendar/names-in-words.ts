@@ -15,7 +15,7 @@ const PART_LETTERS_MIN = 3;
  */
 export function namesIn(words: string, { names, notNames }: KnownNames): string[] {
   const text = words.normalize('NFC');
-  const whole = new Map(names.map((name) => [plain(name), name.trim()]));
+  const whole = new Map(names.map((name) => [nameKey(name), name.trim()]));
   return [...whole.values()].filter(
     (name) =>
       name !== '' &&
@@ -34,11 +34,15 @@ function partsOf(name: string, notNames: ReadonlySet<string>): string[] {
 }
 
 function stands(name: string, text: string, flags: 'u' | 'iu'): boolean {
-  const words = escapePattern(plain(name, false)).replace(/ /gu, String.raw`\s+`);
+  const words = escapePattern(plain(name)).replace(/ /gu, String.raw`\s+`);
   return new RegExp(String.raw`(?<![\p{L}\p{M}\p{N}])${words}(?![\p{L}\p{M}\p{N}])`, flags).test(text);
 }
 
-function plain(name: string, isSmall = true): string {
-  const text = name.normalize('NFC').replace(/\s+/gu, ' ').trim();
-  return isSmall ? text.toLowerCase() : text;
+/** The same for every way to write one name. */
+export function nameKey(name: string): string {
+  return plain(name).toLowerCase();
+}
+
+function plain(name: string): string {
+  return name.normalize('NFC').replace(/\s+/gu, ' ').trim();
 }

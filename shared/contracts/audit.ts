@@ -20,6 +20,8 @@ export const AUDIT_ACTIONS = [
   'card-first-used',
   'open-page-on',
   'open-page-off',
+  'no-name-said',
+  'no-name-taken-back',
   'feed-made',
   'feed-ended',
   'letters-chosen',

@@ -71,6 +71,13 @@ const awaitedOfOpenPage = z.strictObject({
 });
 export type AwaitedOfOpenPage = z.infer<typeof awaitedOfOpenPage>;
 
+/** Stands for the words, the name and who is called so, as they were when it was read. */
+const foundKey = z.string().regex(/^[0-9a-f]{64}$/u);
+
+/** That a name which was found in words of an entry is none there. */
+export const noNameInput = z.strictObject({ entryId: id, word: z.enum(OPEN_WORDS), key: foundKey });
+export type NoNameInput = z.infer<typeof noNameInput>;
+
 /** What the page leaves out of what is open in the newest published version, for whoever keeps the page. */
 export const leftOutOfOpenPage = z.strictObject({
   entryId: id,
@@ -78,7 +85,20 @@ export const leftOutOfOpenPage = z.strictObject({
   /** Empty where it stands there, save some of its words. */
   awaited: z.array(awaitedOfOpenPage),
   /** Where names were found, and whose; these words stay out, of a title the whole entry. */
-  found: z.array(z.strictObject({ word: z.enum(OPEN_WORDS), names: z.array(z.string()) })),
+  found: z.array(
+    z.strictObject({
+      word: z.enum(OPEN_WORDS),
+      text: z.string(),
+      names: z.array(z.strictObject({ name: z.string(), key: foundKey })),
+    }),
+  ),
+  /** What would be taken for a name, had nobody said that it is none there. */
+  noNames: z.array(
+    z.strictObject({
+      ...{ id, word: z.enum(OPEN_WORDS), text: z.string(), name: z.string() },
+      ...{ saidByName: z.string(), saidAt: instant },
+    }),
+  ),
 });
 export type LeftOutOfOpenPage = z.infer<typeof leftOutOfOpenPage>;
 
@@ -104,6 +124,24 @@ export const openPageEndpoints = {
     access: keepers,
     params,
     response: listOf(leftOutOfOpenPage),
+  }),
+  sayNoName: defineEndpoint({
+    id: 'sayNoName',
+    method: 'POST',
+    path: '/api/communities/:communityId/open-page/no-names',
+    summary:
+      'Say that what was found in words of an entry is nobody’s name there; asked anew when the words or the people change',
+    access: keepers,
+    params,
+    body: noNameInput,
+  }),
+  takeBackNoName: defineEndpoint({
+    id: 'takeBackNoName',
+    method: 'DELETE',
+    path: '/api/communities/:communityId/open-page/no-names/:noNameId',
+    summary: 'Take back that something is nobody’s name; what is taken back already stays so',
+    access: keepers,
+    params: params.extend({ noNameId: id }),
   }),
   code: defineEndpoint({
     id: 'drawOpenPageCode',

@@ -100,6 +100,7 @@ export function paramsOf(endpoint: Endpoint, role: Role | null, village: Village
     itemId: endpoint.id === 'removeSound' ? village.attachmentId : village.entryId,
     markerKey: 'pleiades',
     feedId: randomUUID(),
+    noNameId: randomUUID(),
     deviceId: '0'.repeat(64),
     number: String(reviewed.has(endpoint.id) ? village.reviewedNumber : village.publishedNumber),
   };
@@ -206,6 +207,7 @@ export function bodyOf(endpoint: Endpoint, role: Role | null, village: Village):
     }),
     // To itself, which is refused once somebody may copy at all.
     copyCalendar: () => ({ dryRun: true, toCalendarId: village.calendarId }),
+    sayNoName: () => ({ entryId: village.entryId, word: 'caution', key: '0'.repeat(64) }),
     switchOpenPageOn: () => ({ placeShown: 'name' }),
     addVariant: () => variantInput(),
     updateVariant: () => ({ content: variantInput(), ...stale }),

@@ -25,6 +25,7 @@ import { PlaceEntity } from './place.entity.js';
 import { SessionEntity } from './session.entity.js';
 import { SignInCardEntity } from './sign-in-card.entity.js';
 import { SignatureEntity } from './signature.entity.js';
+import { NoNameEntity } from './no-name.entity.js';
 import { OpenPageEntity } from './open-page.entity.js';
 import { RolledItemEntity } from './rolled-item.entity.js';
 import { RolloverEntity } from './rollover.entity.js';
@@ -91,6 +92,7 @@ export const ENTITIES = [
   ConsentEntity,
   RolloverEntity,
   RolledItemEntity,
+  NoNameEntity,
   OpenPageEntity,
   WriteKeyEntity,
   SeasonLessonEntity,

@@ -27,6 +27,7 @@ import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.j
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 import { WordLists1799300000000 } from './1799300000000-word-lists.js';
 import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
+import { NoNames1799760000000 } from './1799760000000-no-names.js';
 import { OwnSightings1799300100000 } from './1799300100000-own-sightings.js';
 import { SeasonReviews1799400000000 } from './1799400000000-season-reviews.js';
 
@@ -63,4 +64,5 @@ export const MIGRATIONS = [
   OwnSightings1799300100000,
   SeasonReviews1799400000000,
   OneKindOfKeys1799600000000,
+  NoNames1799760000000,
 ];

@@ -2,11 +2,13 @@ import type { DataSource } from 'typeorm';
 import type { Clock } from '../../http/context.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import { LeftOutService } from './left-out.service.js';
+import { NoNamesService } from './no-names.service.js';
 import { OpenPageService } from './open-page.service.js';
 
 export interface OpenPageServices {
   pages: OpenPageService;
   leftOut: LeftOutService;
+  noNames: NoNamesService;
 }
 
 export function openPageServices(
@@ -18,5 +20,6 @@ export function openPageServices(
   return {
     pages: new OpenPageService(dataSource, clock, contents, publicUrl),
     leftOut: new LeftOutService(dataSource, contents),
+    noNames: new NoNamesService(dataSource, clock, contents),
   };
 }

@@ -1,14 +1,11 @@
 import { boardOf } from '#shared/calendar/variants.js';
 import { isStarLead } from '#shared/calendar/entry-model.js';
-import { namesIn, type KnownNames } from '#shared/calendar/names-in-words.js';
-import {
-  OPEN_WORDS,
-  type LeftOutOfOpenPage,
-  type OpenEntry,
-  type OpenPage,
-  type OpenPageState,
-  type OpenWord,
-  type PlaceShown,
+import type {
+  OpenEntry,
+  OpenPage,
+  OpenPageState,
+  OpenWord,
+  PlaceShown,
 } from '#shared/contracts/open-page.js';
 import type { PlaceSnapshot } from '#shared/contracts/stars.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
@@ -34,22 +31,10 @@ export function toOpenEntry(body: VersionEntryBody): OpenEntry {
   };
 }
 
-/** Where names of people stand in what everybody would read. */
-export function foundNames(entry: OpenEntry, known: KnownNames): LeftOutOfOpenPage['found'] {
-  return OPEN_WORDS.map((word) => ({ word, names: namesIn(entry[word], known) })).filter(
-    ({ names }) => names.length > 0,
-  );
-}
-
 /** Without the words in which a name stands; null where it is a title, for what has none is nothing. */
-export function withoutNames(entry: OpenEntry, known: KnownNames): OpenEntry | null {
-  const found = foundNames(entry, known).map(({ word }) => word);
-  if (found.some(isTitle)) return null;
-  return { ...entry, ...Object.fromEntries(found.map((word) => [word, ''])) };
-}
-
-export function isTitle(word: OpenWord): boolean {
-  return word === 'titleOfficer' || word === 'titleVillage';
+export function withoutNames(entry: OpenEntry, named: readonly OpenWord[]): OpenEntry | null {
+  if (named.includes('titleOfficer') || named.includes('titleVillage')) return null;
+  return { ...entry, ...Object.fromEntries(named.map((word) => [word, ''])) };
 }
 
 const ROUNDED_TO_DEG = { nothing: null, name: null, degree: 1, tenth: 0.1 } as const;

@@ -6,7 +6,11 @@ import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
 import type { OpenPageServices } from './open-page-services.js';
 
-export function openPageRoutes(router: Router, mount: Mount, { pages, leftOut }: OpenPageServices): void {
+export function openPageRoutes(
+  router: Router,
+  mount: Mount,
+  { pages, leftOut, noNames }: OpenPageServices,
+): void {
   router.get(openPageEndpoints.read.path, ...feedLimits(), (_request, response, next) => {
     response.setHeader('X-Robots-Tag', 'noindex, nofollow');
     next();
@@ -14,6 +18,14 @@ export function openPageRoutes(router: Router, mount: Mount, { pages, leftOut }:
 
   mount.forMember(openPageEndpoints.state, (_call, actor) => pages.state(actor));
   mount.forMember(openPageEndpoints.leftOut, async (_call, actor) => wholeList(await leftOut.list(actor)));
+  mount.forMember(openPageEndpoints.sayNoName, async ({ body }, actor) => {
+    await noNames.say(actor, body);
+    return undefined;
+  });
+  mount.forMember(openPageEndpoints.takeBackNoName, async ({ params }, actor) => {
+    await noNames.takeBack(actor, params.noNameId);
+    return undefined;
+  });
   mount.forMember(openPageEndpoints.switchOn, ({ body }, actor) => pages.switchOn(actor, body.placeShown));
   mount.forMember(openPageEndpoints.switchOff, async (_call, actor) => {
     await pages.switchOff(actor);

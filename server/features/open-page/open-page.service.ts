@@ -14,7 +14,7 @@ import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
-import { knownNames } from './known-names.service.js';
+import { namesFoundIn } from './names-found.service.js';
 import { newestPublished } from './newest-published.service.js';
 import { toOpenEntry, toOpenPageState, toOpenPlace, withoutNames } from './open-page.mapper.js';
 
@@ -87,8 +87,18 @@ export class OpenPageService {
     if (newest === null) {
       return { ...about, placeName: null, place: null, version: null, markers: [], entries: [] };
     }
-    const { header, entries, givers } = await this.contents.readForEverybody(communityId, newest);
-    const known = await knownNames(manager, communityId, givers);
+    const content = await this.contents.readForEverybody(communityId, newest);
+    const { header } = content;
+    const foundIn = await namesFoundIn(manager, communityId, content);
+    const entries = content.entries.map(toOpenEntry).flatMap((entry) => {
+      const named = foundIn(entry).filter(({ noName }) => noName === null);
+      return (
+        withoutNames(
+          entry,
+          named.map(({ word }) => word),
+        ) ?? []
+      );
+    });
     return {
       ...about,
       ...toOpenPlace(placeShown, header.place),
@@ -98,7 +108,7 @@ export class OpenPageService {
         publishedAt: (newest.publishedAt ?? newest.submittedAt).toISOString(),
       },
       markers: header.markers.map(({ strip: _nights, ...names }) => names),
-      entries: entries.flatMap((entry) => withoutNames(toOpenEntry(entry), known) ?? []),
+      entries,
     };
   }
 

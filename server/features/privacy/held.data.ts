@@ -46,6 +46,7 @@ export const HELD: Readonly<Record<string, Held>> = {
   entry_variant: row('knowledge', ['updated_by'], ['id', 'entry_id']),
   rollover: row('knowledge', ['rolled_by'], ['calendar_id', 'rolled_at']),
   open_page: row('knowledge', ['switched_by'], ['community_id', 'switched_on_at'], ['page_key']),
+  no_name: row('knowledge', ['said_by'], ['entry_id', 'word', 'said_at']),
   rolled_item: row('knowledge', [], []),
   figure: row('knowledge', ['updated_by'], ['id', 'updated_at']),
   sign: row('knowledge', ['updated_by'], ['id', 'updated_at']),

@@ -1,4 +1,5 @@
 import { wasPublished } from '#shared/calendar/version-state.js';
+import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { ConsentUse } from '#shared/contracts/consents.js';
 import type {
   SeenVariant,
@@ -51,7 +52,7 @@ export interface CalendarContent {
 /** What stands on the page for everybody, and what is open and waits for it. */
 export interface ContentForEverybody extends Pick<CalendarContent, 'header' | 'entries'> {
   open: { entry: VersionEntryBody; byClosedFigure: boolean; awaited: AwaitedYes[] }[];
-  givers: string[];
+  givers: Pick<EntryInput, 'giver' | 'giverId'>[];
 }
 
 /** A version as it was sealed. */
@@ -137,8 +138,8 @@ export class FrozenContentService {
       .filter(({ byClosedFigure, awaited }) => !byClosedFigure && awaited.length === 0)
       .map(({ entry }) => entry);
     const givers = frozen.entries.flatMap(({ content, variants = [] }) => [
-      content.giver,
-      ...variants.map(({ content: { giver } }) => giver),
+      content,
+      ...variants.map((variant) => variant.content),
     ]);
     return { header: cutHeader(seen.header, entries).header, entries, open, givers };
   }

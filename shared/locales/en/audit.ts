@@ -27,6 +27,10 @@ export const texts = {
     'open-page-on':
       '{{actor}} switched the page for everybody on, or changed how much of the place it tells.',
     'open-page-off': '{{actor}} switched the page for everybody off.',
+    'no-name-said':
+      '{{actor}} said that words of “{{subject}}” hold no name, so they stand on the page for everybody.',
+    'no-name-taken-back':
+      '{{actor}} took back that words of “{{subject}}” hold no name; they stay off the page for everybody.',
     'feed-made': '{{actor}} made an address for the calendar of a telephone.',
     'feed-ended': '{{actor}} ended an address for the calendar of a telephone.',
     'letters-chosen': '{{actor}} chose how to be asked.',

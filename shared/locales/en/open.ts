@@ -54,6 +54,15 @@ export const texts = {
     offWhat:
       'Its address opens nothing any more, also where it hangs on walls. Switched on again, it has another one.',
     offDo: 'Switch it off now',
+    noName: {
+      say: 'This is no name',
+      sure: 'Is {{name}} not meant here?',
+      what: 'Then these words stand on the page for everybody: “{{text}}”. Your name is kept with it. It is asked anew when the words change, or when somebody else is called so.',
+      do: 'Nobody is meant',
+      title: 'These stand on the page, because somebody said that they name nobody:',
+      said: 'Not {{name}}: said by {{who}}, {{when}}.',
+      takeBack: 'It is a name after all',
+    },
     leftOut: {
       title: 'What is open and stays out',
       none: 'Nothing: all that is open in the newest published calendar stands on the page.',
@@ -77,8 +86,10 @@ export const texts = {
       quoted: '“{{title}}”',
       names:
         'A name of somebody stands in the words of these. Such words stay out, and with a title the whole entry:',
-      found: '{{word}}: {{names}}',
-      rewrite: 'Write it without the name in the draft; the page follows with the next version.',
+      words: '{{word}}: “{{text}}”',
+      takenFor: 'Taken for {{name}}.',
+      rewrite:
+        'Where somebody is meant, write it without the name in the draft; the page follows with the next version. Where it is a common word, say that it is no name.',
       word: {
         titleVillage: 'Name in the village',
         titleOfficer: 'Name for the office',

@@ -53,6 +53,7 @@ export const texts = {
     'not-the-giver': 'Its giver keeps this. Ask them to change it, or leave a note.',
     'officers-write-this':
       'The village’s own entries are written by its officer. Leave a note, or write one that its people keep.',
+    'no-such-name-there': 'These words, or who is called so, are others by now. Look at them once more.',
     'too-many-groups': 'There are as many groups as a village can have.',
     'not-of-the-group': 'Only a group’s own people say who belongs to it. Ask one of them.',
     'too-many-notes': 'There are as many notes and answers here as there can be.',

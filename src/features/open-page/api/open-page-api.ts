@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { openPageEndpoints, type PlaceShown } from '#shared/contracts/open-page.js';
+import { openPageEndpoints, type NoNameInput, type PlaceShown } from '#shared/contracts/open-page.js';
 import { apiUrl, callApi } from '#src/lib/api-client.js';
 import { paths } from '#src/lib/paths.js';
 
@@ -39,6 +39,32 @@ export function useSwitchOff(communityId: string) {
     mutationFn: () => callApi(openPageEndpoints.switchOff, { params: { communityId } }),
     onSettled: useRefresh(communityId),
   });
+}
+
+/** That a name which was found is none; refused where words or people are others by now. */
+export function useSayNoName(communityId: string) {
+  return useMutation({
+    mutationFn: async (body: NoNameInput) => {
+      await callApi(openPageEndpoints.sayNoName, { params: { communityId }, body });
+    },
+    onSettled: useRefreshLeftOut(communityId),
+  });
+}
+
+export function useTakeBackNoName(communityId: string) {
+  return useMutation({
+    mutationFn: (noNameId: string) =>
+      callApi(openPageEndpoints.takeBackNoName, { params: { communityId, noNameId } }),
+    onSettled: useRefreshLeftOut(communityId),
+  });
+}
+
+function useRefreshLeftOut(communityId: string) {
+  const client = useQueryClient();
+  return async () => {
+    await client.invalidateQueries({ queryKey: leftOutQuery(communityId).queryKey });
+    await client.invalidateQueries({ queryKey: ['open-page'] });
+  };
 }
 
 function useRefresh(communityId: string) {

@@ -1,12 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
-import type { LeftOutOfOpenPage } from '#shared/contracts/open-page.js';
 import { paths } from '#src/lib/paths.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { leftOutQuery } from '../api/open-page-api.js';
 import { awaitedGroups, type AwaitedGroup } from '../model/awaited-groups.js';
+import { NamesFound } from './names-found.js';
+import { NoNames } from './no-names.js';
 
 /** What is open and does not stand on the page for everybody, why, and what can be done about it. */
 export function LeftOut({ communityId }: { communityId: string }) {
@@ -14,7 +15,6 @@ export function LeftOut({ communityId }: { communityId: string }) {
   const words = useProblemWords();
   const { data, error, refetch } = useQuery(leftOutQuery(communityId));
   const groups = awaitedGroups(data ?? []);
-  const named = data?.filter(({ found }) => found.length > 0) ?? [];
   return (
     <section className="grid gap-2">
       <h3>{t('board.leftOut.title')}</h3>
@@ -37,18 +37,8 @@ export function LeftOut({ communityId }: { communityId: string }) {
           {groups.map((group) => (
             <Awaited key={`${group.itemType} ${group.what}`} {...group} />
           ))}
-          {named.length > 0 && (
-            <div className="border-t border-hairline pt-3">
-              <p>{t('board.leftOut.names')}</p>
-              <ul className="mt-1 grid gap-1">
-                {named.map(({ entryId, title, found }) => (
-                  <li key={entryId}>
-                    <NamesFound title={title} found={found} />
-                  </li>
-                ))}
-              </ul>
-            </div>
-          )}
+          <NamesFound communityId={communityId} leftOut={data} />
+          <NoNames communityId={communityId} leftOut={data} />
         </>
       )}
     </section>
@@ -81,26 +71,5 @@ function Awaited({ itemType, what, things }: AwaitedGroup) {
         ))}
       </ul>
     </div>
-  );
-}
-
-function NamesFound({ title, found }: Pick<LeftOutOfOpenPage, 'title' | 'found'>) {
-  const { t, i18n } = useTranslation('open');
-  const list = new Intl.ListFormat(i18n.language);
-  return (
-    <>
-      <p>
-        <strong>{title}</strong>
-      </p>
-      {found.map(({ word, names }) => (
-        <p key={word}>
-          {t('board.leftOut.found', {
-            word: t(`board.leftOut.word.${word}`),
-            names: list.format(names),
-          })}
-        </p>
-      ))}
-      <p className="text-small">{t('board.leftOut.rewrite')}</p>
-    </>
   );
 }

@@ -2,7 +2,7 @@ import { expect, it } from 'vitest';
 import { awaitedGroups } from '#src/features/open-page/model/awaited-groups.js';
 
 const entry = (entryId: string, awaited: Parameters<typeof awaitedGroups>[0][number]['awaited']) => ({
-  ...{ entryId, title: `Title ${entryId}`, awaited, found: [] },
+  ...{ entryId, title: `Title ${entryId}`, awaited, found: [], noNames: [] },
 });
 
 it('asks about a figure once, however many entries go by it, and says which', () => {
