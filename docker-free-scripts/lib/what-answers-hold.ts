@@ -242,6 +242,7 @@ export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   listHelpable: 'names elders, and observers for keepers',
   readOpenPageState: 'is a key and how much of the place is told',
   drawOpenPageCode: 'is an address',
+  printOpenPageCard: 'is an address',
   listFeeds: 'is ids and days, of the person alone',
   listGroups: 'names groups and, to their people, members',
   listAskedSharing: 'is levels and ids',

@@ -152,6 +152,15 @@ export const openPageEndpoints = {
     params,
     fileType: 'image/svg+xml',
   }),
+  card: defineEndpoint({
+    id: 'printOpenPageCard',
+    method: 'GET',
+    path: '/api/communities/:communityId/open-page/card.pdf',
+    summary: 'A card to hang up, with the address of the page to scan and to type',
+    access: keepers,
+    params,
+    fileType: 'application/pdf',
+  }),
   read: defineEndpoint({
     id: 'readOpenPage',
     method: 'GET',

@@ -1,4 +1,5 @@
-import type { DrawnPage, Primitive, RectPrimitive } from './primitives.js';
+import { codeSquares, type CodeSquares } from './code-squares.js';
+import type { DrawnPage, Primitive } from './primitives.js';
 import { leadingMm, textBlock, type TextMeasurer, type TextStyle, wrapText } from './text-layout.js';
 
 /** What stands on a card with which somebody signs in. */
@@ -13,8 +14,7 @@ export interface SignInCardModel {
   readonly care: string;
   readonly address: string;
   readonly codeGroups: readonly string[];
-  /** The code's squares, without the quiet ground around them. */
-  readonly squares: { readonly size: number; readonly isDark: (row: number, column: number) => boolean };
+  readonly squares: CodeSquares;
 }
 
 interface Format {
@@ -55,15 +55,10 @@ const FORMATS: Record<SignInCardModel['size'], Format> = {
   },
 };
 
-/** Squares are drawn in runs that overlap by a hair, so that no printer leaves a light line between them. */
-const OVERLAP_MM = 0.02;
-const QUIET_SQUARES = 4;
-
 /** One page: the squares to scan, beside them whose village it is and what to do, below them the letters to type. */
 export function layoutSignInCard(model: SignInCardModel, measurer: TextMeasurer): DrawnPage {
   const format = FORMATS[model.size];
   const { widthMm, heightMm, marginMm, squaresMm } = format;
-  const quietMm = (squaresMm * QUIET_SQUARES) / (model.squares.size + 2 * QUIET_SQUARES);
   const left = marginMm + squaresMm + marginMm / 2;
   const width = widthMm - marginMm - left;
   const foot = footOf(model, format, measurer);
@@ -87,42 +82,11 @@ export function layoutSignInCard(model: SignInCardModel, measurer: TextMeasurer)
     width: widthMm,
     height: heightMm,
     primitives: [
-      ...squaresOf(model, {
-        x: marginMm + quietMm,
-        y: marginMm + quietMm,
-        sideMm: squaresMm - 2 * quietMm,
-      }),
+      ...codeSquares(model.squares, { x: marginMm, y: marginMm, width: squaresMm }),
       ...primitives,
       ...foot.primitives,
     ],
   };
-}
-
-function squaresOf(
-  { squares: { size, isDark } }: SignInCardModel,
-  { x, y, sideMm }: { x: number; y: number; sideMm: number },
-): RectPrimitive[] {
-  const squareMm = sideMm / size;
-  const runs: RectPrimitive[] = [];
-  for (let row = 0; row < size; row += 1) {
-    for (let column = 0; column < size; column += 1) {
-      if (!isDark(row, column)) continue;
-      const from = column;
-      while (column + 1 < size && isDark(row, column + 1)) column += 1;
-      runs.push({
-        type: 'rect',
-        role: 'code',
-        x: x + from * squareMm,
-        y: y + row * squareMm,
-        width: (column - from + 1) * squareMm,
-        height: squareMm + OVERLAP_MM,
-        fill: 'solid',
-        strokeMm: 0,
-        cornerMm: 0,
-      });
-    }
-  }
-  return runs;
 }
 
 /** The letters and the address, for a phone that cannot scan: from the bottom edge upwards. */

@@ -15,6 +15,7 @@ import {
 import { addConsent, asked } from '#tests/support/consent-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
 import { switchOpenPageOn } from '#tests/support/open-page-api.js';
+import { readPdfText } from '#tests/support/pdf/read-text.js';
 import { withdraw } from '#tests/support/withdrawal-api.js';
 
 /** A village's page for whoever has its address. */
@@ -81,10 +82,12 @@ const page = async (key: string) => (await read(key).expect(200)).body as OpenPa
 describe('the page for everybody', () => {
   it('is off at first, and switched on and off by officer and steward alone', async () => {
     expect((await village.officer.get(path).expect(200)).body).toMatchObject({ key: null });
-    expect((await village.officer.get(`${path}/code.svg`)).status).toBe(404);
+    for (const paper of ['code.svg', 'card.pdf']) {
+      expect((await village.officer.get(`${path}/${paper}`)).status).toBe(404);
+    }
     expect(reasonOf(await village.elder.put(path, { placeShown: 'name' }))).toBe('403 not-allowed');
     const key = await switchOpenPageOn(village.steward);
-    expect(key).toMatch(/^[\w-]{32}$/u);
+    expect(key).toMatch(/^(?:[A-HJKMNP-Z2-9]{4}-){4}[A-HJKMNP-Z2-9]{4}$/u);
     expect(await switchOpenPageOn(village.officer, 'degree')).toBe(key);
     await read(key).expect(200);
     await village.officer.delete(path).expect(204);
@@ -165,11 +168,17 @@ describe('the page for everybody', () => {
     expect((await read(key)).text).not.toContain('Our own bowl');
   });
 
-  it('is drawn as a code, and slow to guess', async () => {
+  it('is drawn as a code and printed to hang up, typed in letters of any size, and slow to guess', async () => {
     const state = (await village.officer.get(path).expect(200)).body as OpenPageState;
     const code = await village.officer.get(`${path}/code.svg`).expect(200);
     expect(code.headers['content-type']).toBe('image/svg+xml');
     expect(Buffer.from(code.body as Buffer).toString()).toMatch(/^<svg /u);
+    const card = await village.officer.get(`${path}/card.pdf`).responseType('blob');
+    expect([card.status, card.headers['content-type']]).toEqual([200, 'application/pdf']);
+    const words = readPdfText(card.body as Buffer).replace(/\s+/gu, ' ');
+    expect(words).toContain('Anybody can read this.');
+    expect(words.replaceAll(' ', '')).toContain(`/open?page=${state.key ?? ''}`);
+    expect((await read((state.key ?? '').toLowerCase().replaceAll('-', ''))).status).toBe(200);
     const guesses = await Promise.all(
       Array.from({ length: 60 }, (_, index) => read(`guess-${String(index)}`)),
     );

@@ -1,14 +1,14 @@
 import { CONSENT_USES, type Consent } from '#shared/contracts/consents.js';
 import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
-import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import type { ConsentCardModel } from '#shared/sheet/consent-card.js';
+import { dayInWords } from '../../print/day-in-words.js';
 import { translatorFor, type Translate } from '../../print/translator.js';
 
 /** A consent as everything that its printed card says, in one language. */
 export function toConsentCard(consent: Consent, communityName: string, language: string): ConsentCardModel {
   const t = translatorFor(language, 'consents');
   const { content } = consent;
-  const day = (iso: string) => dayWords(iso, language);
+  const day = (iso: string) => dayInWords(iso, language);
   const list = (words: readonly string[]) => new Intl.ListFormat(language).format(words);
   const item = t(`item.${consent.itemType}`);
   return {
@@ -66,19 +66,4 @@ function askedOf({ content, state }: Consent, t: Translate, day: (iso: string) =
 
 function afterDeathOf({ content: { afterDeath, passTo } }: Consent, t: Translate): string {
   return afterDeath === 'pass-to' ? t('afterDeath.passTo', { name: passTo }) : t(`afterDeath.${afterDeath}`);
-}
-
-const MS_PER_DAY = 86_400_000;
-const UNIX_EPOCH_DAY_NUMBER = 2_440_588;
-
-/** Day first, as the screens have it; a date never breaks. */
-function dayWords(iso: string, language: string): string {
-  return new Intl.DateTimeFormat(language === 'en' ? 'en-GB' : language, {
-    timeZone: 'UTC',
-    day: 'numeric',
-    month: 'long',
-    year: 'numeric',
-  })
-    .format((dayNumberFromIso(iso) - UNIX_EPOCH_DAY_NUMBER) * MS_PER_DAY)
-    .replaceAll(' ', '\u00a0');
 }

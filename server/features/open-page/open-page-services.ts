@@ -3,10 +3,12 @@ import type { Clock } from '../../http/context.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import { LeftOutService } from './left-out.service.js';
 import { NoNamesService } from './no-names.service.js';
+import { OpenPageCardService } from './open-page-card.service.js';
 import { OpenPageService } from './open-page.service.js';
 
 export interface OpenPageServices {
   pages: OpenPageService;
+  cards: OpenPageCardService;
   leftOut: LeftOutService;
   noNames: NoNamesService;
 }
@@ -18,7 +20,8 @@ export function openPageServices(
   publicUrl: string,
 ): OpenPageServices {
   return {
-    pages: new OpenPageService(dataSource, clock, contents, publicUrl),
+    pages: new OpenPageService(dataSource, clock, contents),
+    cards: new OpenPageCardService(dataSource, clock, publicUrl),
     leftOut: new LeftOutService(dataSource, contents),
     noNames: new NoNamesService(dataSource, clock, contents),
   };

@@ -9,7 +9,7 @@ import type { OpenPageServices } from './open-page-services.js';
 export function openPageRoutes(
   router: Router,
   mount: Mount,
-  { pages, leftOut, noNames }: OpenPageServices,
+  { pages, cards, leftOut, noNames }: OpenPageServices,
 ): void {
   router.get(openPageEndpoints.read.path, ...feedLimits(), (_request, response, next) => {
     response.setHeader('X-Robots-Tag', 'noindex, nofollow');
@@ -33,7 +33,11 @@ export function openPageRoutes(
   });
   mount.forMember(
     openPageEndpoints.code,
-    async (_call, actor) => new FileReply(await pages.code(actor), 'open-page.svg', 'inline'),
+    async (_call, actor) => new FileReply(await cards.code(actor), 'open-page.svg', 'inline'),
   );
+  mount.forMember(openPageEndpoints.card, async (_call, actor) => {
+    const { content, fileName } = await cards.pdf(actor);
+    return new FileReply(content, fileName, 'inline');
+  });
   mount.forAnybody(openPageEndpoints.read, ({ query }) => pages.read(query.key));
 }

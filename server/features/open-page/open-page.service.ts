@@ -1,12 +1,5 @@
-import {
-  OPEN_PAGE_PATH,
-  type OpenPage,
-  type OpenPageState,
-  type PlaceShown,
-} from '#shared/contracts/open-page.js';
-import { randomBytes } from 'node:crypto';
-import QRCode from 'qrcode';
-import type { DataSource, EntityManager } from 'typeorm';
+import { type OpenPage, type OpenPageState, type PlaceShown } from '#shared/contracts/open-page.js';
+import { In, type DataSource, type EntityManager } from 'typeorm';
 import { OpenPageEntity } from '../../db/entities/open-page.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
 import type { Actor } from '../../http/actor.js';
@@ -16,11 +9,8 @@ import { recordAudit } from '../audit/audit.service.js';
 import type { FrozenContentService } from '../versions/frozen-content.service.js';
 import { namesFoundIn } from './names-found.service.js';
 import { newestPublished } from './newest-published.service.js';
+import { keysMeant, newPageKey } from './page-key.js';
 import { toOpenEntry, toOpenPageState, toOpenPlace, withoutNames } from './open-page.mapper.js';
-
-const KEY_BYTES = 24;
-/** White around the code, in its own modules: readers need four. */
-const QUIET_MODULES = 4;
 
 /** What a village shows to everybody who has the address: open entries of what it published last. */
 export class OpenPageService {
@@ -28,7 +18,6 @@ export class OpenPageService {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly contents: FrozenContentService,
-    private readonly publicUrl: string,
   ) {}
 
   async state({ communityId }: Actor): Promise<OpenPageState> {
@@ -46,7 +35,7 @@ export class OpenPageService {
       if (known?.placeShown === placeShown) return;
       if (known !== null) await manager.update(OpenPageEntity, { communityId }, { placeShown });
       else {
-        const pageKey = randomBytes(KEY_BYTES).toString('base64url');
+        const pageKey = newPageKey();
         const row = { communityId, pageKey, placeShown, switchedBy: person.id, switchedOnAt: at };
         await manager.insert(OpenPageEntity, row);
       }
@@ -65,19 +54,11 @@ export class OpenPageService {
     });
   }
 
-  /** The address as a picture to print. */
-  async code({ communityId }: Actor): Promise<string> {
-    const row = await this.dataSource.manager.findOneBy(OpenPageEntity, { communityId });
-    if (row === null) throw notFound();
-    const address = `${this.publicUrl}${OPEN_PAGE_PATH}?page=${row.pageKey}`;
-    return QRCode.toString(address, { type: 'svg', errorCorrectionLevel: 'M', margin: QUIET_MODULES });
-  }
-
   /** Decided anew at every reading: levels, seasons, consents, and whether the page is on. */
   async read(key: string): Promise<OpenPage> {
     const { manager } = this.dataSource;
     const row = await manager.findOne(OpenPageEntity, {
-      where: { pageKey: key },
+      where: { pageKey: In(keysMeant(key)) },
       relations: { community: true },
     });
     if (row === null) throw notFound();

@@ -30,6 +30,14 @@ export const texts = {
   takeCare: 'Take care: {{words}}',
   noDay: 'No day this year.',
   foot: 'A page that the village opened itself, with what it shares with everybody. It is not for search engines.',
+  card: {
+    what: 'Which work is done on which days, and by which star: what the village itself opened to everybody.',
+    forAll: 'Anybody can read this.',
+    how: 'Hold a telephone’s camera over the squares. Or type this address, all of it in one piece:',
+    ends: 'The village can switch the page off on any day; then this address opens nothing, and this card can be taken down.',
+    printed: 'Printed on {{day}}.',
+    fileName: 'Page for everybody {{village}}',
+  },
   board: {
     title: 'A page for everybody',
     what: 'What is open of the newest published calendar, and was agreed to for this page, for whoever has the address. Nobody asked is a no. People’s names are looked for in its words, and words with one stay out. It is off until you switch it on.',
@@ -48,7 +56,8 @@ export const texts = {
     look: 'See the page',
     copy: 'Copy the address',
     code: 'The address as a picture',
-    print: 'Picture to print (QR)',
+    card: 'Card to hang up',
+    picture: 'Picture alone (QR)',
     off: 'Switch it off',
     offSure: 'Switch the page off?',
     offWhat:

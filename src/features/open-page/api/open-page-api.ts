@@ -81,3 +81,8 @@ export function openPageAddress(key: string): string {
 export function openPageCodeUrl(communityId: string, key: string): string {
   return `${apiUrl(openPageEndpoints.code, { params: { communityId } })}?of=${encodeURIComponent(key.slice(0, 8))}`;
 }
+
+/** A card to hang up, with the address to scan and to type. */
+export function openPageCardUrl(communityId: string): string {
+  return apiUrl(openPageEndpoints.card, { params: { communityId } });
+}

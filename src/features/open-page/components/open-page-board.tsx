@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { Copy, Globe, GlobeLock, Printer } from 'lucide-react';
+import { Copy, Globe, GlobeLock, Printer, QrCode } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { PLACES_SHOWN, type OpenPageState, type PlaceShown } from '#shared/contracts/open-page.js';
@@ -15,6 +15,7 @@ import { useToast } from '#src/ui/toast.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import {
   openPageAddress,
+  openPageCardUrl,
   openPageCodeUrl,
   openPageStateQuery,
   useSwitchOff,
@@ -116,8 +117,11 @@ function Address({ communityId, pageKey }: { communityId: string; pageKey: strin
         >
           {t('board.copy')}
         </Button>
-        <ButtonAnchor href={picture} download="open-page.svg" icon={<Printer aria-hidden size={20} />}>
-          {t('board.print')}
+        <ButtonAnchor href={openPageCardUrl(communityId)} icon={<Printer aria-hidden size={20} />}>
+          {t('board.card')}
+        </ButtonAnchor>
+        <ButtonAnchor href={picture} download="open-page.svg" icon={<QrCode aria-hidden size={20} />}>
+          {t('board.picture')}
         </ButtonAnchor>
         <SureButton
           label={t('board.off')}
