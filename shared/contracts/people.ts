@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { id, instant, line, listOf, monthDay, rowVersion } from './common.js';
 import { defineEndpoint, member, signedIn } from './endpoint.js';
+import { localMonths, moonNames } from './local-months.js';
 
 export const ROLES = ['steward', 'officer', 'elder', 'staff', 'observer'] as const;
 export type Role = (typeof ROLES)[number];
@@ -65,6 +66,9 @@ export const communityInput = z.strictObject({
   officerLanguage: language,
   /** When the local year begins; the note says it in the village's own terms. */
   yearStart: z.strictObject({ date: monthDay, note: line(200) }),
+  /** What the village calls parts of its year, if it names any. */
+  localMonths,
+  moonNames,
   weatherContact: line(200),
   agricultureContact: line(200),
   signOffRule,
@@ -144,7 +148,7 @@ export const peopleEndpoints = {
     id: 'updateCommunity',
     method: 'PUT',
     path: '/api/communities/:communityId',
-    summary: 'Change languages, year start, contacts and the sign-off rule',
+    summary: 'Change languages, year start, names of months and Moons, contacts and the sign-off rule',
     access: member('community', 'steward'),
     params: communityParams,
     body: communityUpdate,

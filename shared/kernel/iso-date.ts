@@ -105,6 +105,11 @@ export function dayOfYear(iso: IsoDate): number {
   return dayNumberFromIso(iso) - dayNumberOf(year, 1, 1) + 1;
 }
 
+/** Ascending through the months and days of a year. */
+export function monthDayKey({ month, day }: Pick<CivilDate, 'month' | 'day'>): number {
+  return month * 100 + day;
+}
+
 function twoDigits(value: number): string {
   return String(value).padStart(2, '0');
 }

@@ -218,6 +218,29 @@ describe('settings', () => {
     expect((late.body as Problem).current).toMatchObject({ weatherContact: 'Call 111' });
   });
 
+  it('hold names of months in the order of the village’s year, and say which of them cannot be', async () => {
+    const path = `/api/communities/${steward.communityId}`;
+    const { id: _id, ...settings } = (await steward.get(path)).body as Community;
+    const begins = (name: string, month: number, day: number) => ({ name, begins: { month, day } });
+    const withMonths = (...localMonths: object[]) => ({ ...settings, localMonths });
+    const unnamed = await steward.put(path, withMonths(begins('Wet', 6, 8), begins('', 3, 1)));
+    expect((unnamed.body as Problem).errors).toMatchObject([
+      { field: 'localMonths.1.name', code: 'required' },
+    ]);
+    const oneDay = await steward.put(path, withMonths(begins('Wet', 6, 8), begins('Dry', 6, 8)));
+    expect(oneDay.status).toBe(422);
+    expect((oneDay.body as Problem).errors).toMatchObject([
+      { field: 'localMonths.1.begins', code: 'day-taken' },
+    ]);
+
+    const moonNames = settings.moonNames.map((_, index) => (index === 12 ? ' Late ' : ''));
+    const sent = { ...withMonths(begins('Hot', 3, 1), begins('Wet', 6, 8), begins('Dry', 11, 2)), moonNames };
+    await steward.put(path, sent).expect(200);
+    const saved = (await steward.get(path).expect(200)).body as Community;
+    expect(saved.localMonths.map(({ name }) => name)).toEqual(['Wet', 'Dry', 'Hot']);
+    expect(saved.moonNames[12]).toBe('Late');
+  });
+
   it('name only elders of the village in the sign-off rule, and ask for no more than there are', async () => {
     const path = `/api/communities/${steward.communityId}`;
     const { id: _id, ...settings } = (await steward.get(path)).body as Community;

@@ -1,3 +1,4 @@
+import type { LocalMonth } from '#shared/contracts/local-months.js';
 import type { SignOffRule } from '#shared/contracts/people.js';
 import { Column, Entity, PrimaryColumn, VersionColumn } from 'typeorm';
 import { codeColumn, instantColumn } from './columns.js';
@@ -30,6 +31,13 @@ export class CommunityEntity {
 
   @Column({ name: 'year_start_note', type: 'varchar', length: 200 })
   yearStartNote!: string;
+
+  @Column({ name: 'local_months', type: 'json' })
+  localMonths!: LocalMonth[];
+
+  /** Of the first to the thirteenth Moon; empty where it goes by its number. */
+  @Column({ name: 'moon_names', type: 'json' })
+  moonNames!: string[];
 
   @Column({ name: 'weather_contact', type: 'varchar', length: 200 })
   weatherContact!: string;

@@ -26,6 +26,7 @@ import { RolloverGrounds1799100000000 } from './1799100000000-rollover-grounds.j
 import { RestoredEntries1799110000000 } from './1799110000000-restored-entries.js';
 import { WriteKeys1799200000000 } from './1799200000000-write-keys.js';
 import { WordLists1799300000000 } from './1799300000000-word-lists.js';
+import { LocalMonths1799750000000 } from './1799750000000-local-months.js';
 import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
 import { NoNames1799760000000 } from './1799760000000-no-names.js';
 import { OwnSightings1799300100000 } from './1799300100000-own-sightings.js';
@@ -64,5 +65,6 @@ export const MIGRATIONS = [
   OwnSightings1799300100000,
   SeasonReviews1799400000000,
   OneKindOfKeys1799600000000,
+  LocalMonths1799750000000,
   NoNames1799760000000,
 ];

@@ -1,3 +1,4 @@
+import { unnamedMoons, type LocalMonth } from '#shared/contracts/local-months.js';
 import type { CommunityInput, Role } from '#shared/contracts/people.js';
 import type { FigureInput } from '#shared/contracts/figures.js';
 import type { PlaceInput } from '#shared/contracts/places.js';
@@ -40,6 +41,14 @@ function months(...named: number[]): PlaceInput['rainMonths'] {
   return Array.from({ length: 12 }, (_, index) => named.includes(index + 1));
 }
 
+/** Months by the days on which they begin, `MM-DD`. */
+function named(begins: Record<string, string>): LocalMonth[] {
+  return Object.entries(begins).map(([day, name]) => {
+    const [month = 1, dayOfMonth = 1] = day.split('-').map(Number);
+    return { name, begins: { month, day: dayOfMonth } };
+  });
+}
+
 export const UPPER_TAZIMEL: DemoVillage = {
   settings: {
     name: 'Upper Tazimel',
@@ -49,6 +58,22 @@ export const UPPER_TAZIMEL: DemoVillage = {
       date: { month: 6, day: 8 },
       note: 'The day after the Cluster’s first dawn; moons are counted',
     },
+    localMonths: named({
+      '06-08': 'Ŋɔ́rɛ̃',
+      '07-05': 'Ɓèŋu̍',
+      '08-01': 'Wírra̰m',
+      '09-06': 'Ɗòŋɛ̃',
+      '10-03': 'Kʼáselu',
+      '10-30': 'Tsʼíɗa̰',
+      '11-28': 'Màvɔru',
+      '12-28': 'Hɛ́lɛ̃zi',
+      '01-30': 'Zɔ̀ɗu',
+      '03-01': 'Chʼárɔ̃',
+      '04-02': 'Nìvɛ́la',
+      '05-05': 'Rúŋɔ̃ti',
+    }),
+    // The one that comes in some years only; the others go by their number.
+    moonNames: [...unnamedMoons().slice(1), 'Zìɓɔ́n'],
     weatherContact: 'National weather service, call 900',
     agricultureContact: 'District agricultural office, call 901',
   },
@@ -99,6 +124,8 @@ export const VARDESCA_TERRACES: DemoVillage = {
     villageLanguage: { tag: 'art-x-vardesca', name: 'Vardescan' },
     officerLanguage: { tag: 'en', name: 'English' },
     yearStart: { date: { month: 6, day: 23 }, note: 'The first morning the Belt is seen' },
+    localMonths: [],
+    moonNames: unnamedMoons(),
     weatherContact: 'Mountain weather service, call 910',
     agricultureContact: 'Provincial agricultural office, call 911',
   },
@@ -183,6 +210,8 @@ export const THOLMERE_LANDING: DemoVillage = {
     villageLanguage: { tag: 'art-x-tholmere', name: 'Tholmer' },
     officerLanguage: { tag: 'en', name: 'English' },
     yearStart: { date: { month: 8, day: 1 }, note: 'The first dark evening after the light nights' },
+    localMonths: [],
+    moonNames: unnamedMoons(),
     weatherContact: 'Coast weather service, call 920',
     agricultureContact: 'Northern agricultural office, call 921',
   },

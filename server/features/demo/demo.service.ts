@@ -62,6 +62,8 @@ async function foundVillage(
     yearStartMonth: settings.yearStart.date.month,
     yearStartDay: settings.yearStart.date.day,
     yearStartNote: settings.yearStart.note,
+    localMonths: settings.localMonths,
+    moonNames: settings.moonNames,
     weatherContact: settings.weatherContact,
     agricultureContact: settings.agricultureContact,
     signOffRule: { ...rule, mustSign: idsOf(rule.mustSign), oneOf: idsOf(rule.oneOf) },

@@ -1,3 +1,4 @@
+import { fromYearStart } from '#shared/calendar/local-months.js';
 import type { Community, CommunityInput, CommunityPerson } from '#shared/contracts/people.js';
 import type { CommunityEntity } from '../../db/entities/community.entity.js';
 import type { MembershipEntity } from '../../db/entities/membership.entity.js';
@@ -10,6 +11,8 @@ export function toCommunity(row: CommunityEntity): Community {
     villageLanguage: { tag: row.villageLanguageTag, name: row.villageLanguageName },
     officerLanguage: { tag: row.officerLanguageTag, name: row.officerLanguageName },
     yearStart: { date: { month: row.yearStartMonth, day: row.yearStartDay }, note: row.yearStartNote },
+    localMonths: row.localMonths,
+    moonNames: row.moonNames,
     weatherContact: row.weatherContact,
     agricultureContact: row.agricultureContact,
     signOffRule: row.signOffRule,
@@ -29,6 +32,8 @@ export function fromCommunityInput(
     yearStartMonth: input.yearStart.date.month,
     yearStartDay: input.yearStart.date.day,
     yearStartNote: input.yearStart.note,
+    localMonths: fromYearStart(input.localMonths, input.yearStart.date),
+    moonNames: input.moonNames,
     weatherContact: input.weatherContact,
     agricultureContact: input.agricultureContact,
     signOffRule: input.signOffRule,

@@ -1,3 +1,4 @@
+import { unnamedMoons } from '#shared/contracts/local-months.js';
 import type {
   ChangePasswordInput,
   FirstStewardInput,
@@ -176,6 +177,8 @@ const EMPTY_SETTINGS = {
   yearStartMonth: 1,
   yearStartDay: 1,
   yearStartNote: '',
+  localMonths: [],
+  moonNames: unnamedMoons(),
   weatherContact: '',
   agricultureContact: '',
   signOffRule: { minElders: 1, mustSign: [], oneOf: [], steward: true },

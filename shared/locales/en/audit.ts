@@ -152,6 +152,8 @@ export const texts = {
     villageLanguage: 'language of the village',
     officerLanguage: 'second language',
     yearStart: 'start of the year',
+    localMonths: 'names of months',
+    moonNames: 'names of Moons',
     weatherContact: 'weather contact',
     agricultureContact: 'agriculture contact',
     signOffRule: 'who signs',

@@ -218,6 +218,8 @@ export const texts = {
     'years-range': 'One to twenty years at once.',
     'year-range': 'The engine knows the years from −3000 to 3000.',
     'calendar-year': 'Calendars are made for the years 1900 to 2200.',
+    'day-taken': 'Another month begins on this day already. Choose another day, or take one of the two out.',
+    'too-many-months': 'A village names at most 24 months. Take some out.',
     'no-such-day': 'This month has no such day. For the end of February write the 28th.',
     'year-order': 'The last year comes after the first one.',
     'month-day': 'Write a month and a day, such as 06-07.',

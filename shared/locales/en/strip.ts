@@ -13,8 +13,10 @@ export const texts = {
   scale: {
     none: 'None',
     moons: 'Moons',
+    months: 'Village months',
     market: 'Market weeks',
   },
+  monthsNotNamed: 'Village months: none are named in its settings',
   otherCalendars: 'Calendars that this browser knows',
   marketDays: 'Days from market to market',
   marketDay: 'A day with a market',

@@ -14,18 +14,19 @@ export interface ScaleMonth {
 /** Three letters and a little air, in pixels. */
 const SHORT_NAME_WIDTH = 38;
 
-/** Names of the months under or over a lane; one letter each where there is little room. */
-export const MonthScale = memo(function MonthScale({
-  span,
-  months,
-}: {
+interface MonthScaleProps {
   span: DaySpan;
   months: readonly ScaleMonth[];
-}) {
+  /** Of the names, where it is not the reader's. */
+  lang?: string | undefined;
+}
+
+/** Names of the months under or over a lane; one letter each where there is little room. */
+export const MonthScale = memo(function MonthScale({ span, months, lang }: MonthScaleProps) {
   const [ref, width] = useWidth(600);
   const narrow = width / months.length < SHORT_NAME_WIDTH;
   return (
-    <div ref={ref} className={classNames('picture month-scale', narrow && 'short')} aria-hidden>
+    <div ref={ref} className={classNames('picture month-scale', narrow && 'short')} lang={lang} aria-hidden>
       {months.map((month) => {
         const place = stretch(month.dayNumber, month.dayNumber + month.days - 1, span);
         if (place === null) return null;

@@ -52,8 +52,8 @@ export interface YearBoardProps {
   onChoose?: ((key: string) => void) | undefined;
   /** Lets windows be moved: the whole of one, its beginning or its end. */
   moves?: BarMoves | undefined;
-  /** A second scale under the months: Moons, market weeks, another calendar. */
-  secondScale?: { name: string; parts: readonly ScaleMonth[] } | undefined;
+  /** A second scale under the months: Moons, market weeks, another calendar; `lang` is that of its parts. */
+  secondScale?: { name: string; parts: readonly ScaleMonth[]; lang?: string | undefined } | undefined;
 }
 
 const LANE_HEIGHT = 24;
@@ -110,7 +110,7 @@ export function YearBoard(props: YearBoardProps) {
           <div className="year-board-name text-small text-umber-soft" aria-hidden>
             <span title={props.secondScale.name}>{props.secondScale.name}</span>
           </div>
-          <MonthScale span={span} months={props.secondScale.parts} />
+          <MonthScale span={span} months={props.secondScale.parts} lang={props.secondScale.lang} />
         </>
       )}
       <div className="year-board-names" aria-hidden style={{ paddingTop: lanesTop }}>

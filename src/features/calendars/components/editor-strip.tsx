@@ -114,7 +114,7 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
           <StripTable entries={shown} year={year} markers={byKey ?? NO_NAMES} ways={canWrite ? ways : null} />
         </More>
         <More label={t('strip:tools')}>
-          <StripSettings strip={strip} yearStart={editor.community?.yearStart.date ?? null} />
+          <StripSettings strip={strip} community={editor.community} />
         </More>
         {strip.second && <ScaleTable {...strip.second} />}
       </div>

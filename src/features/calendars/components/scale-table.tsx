@@ -2,10 +2,10 @@ import { useTranslation } from 'react-i18next';
 import { useDateWords } from '#src/lib/date-words.js';
 import { More } from '#src/ui/fold.js';
 import { Table } from '#src/ui/table.js';
-import type { ScalePart } from '../model/strip-scale.js';
+import type { SecondScale } from '../model/use-second-scale.js';
 
 /** The second scale in words: what each part is called and when it begins. */
-export function ScaleTable({ name, parts }: { name: string; parts: readonly ScalePart[] }) {
+export function ScaleTable({ name, parts, lang }: SecondScale) {
   const { t } = useTranslation('strip');
   const dates = useDateWords();
   return (
@@ -18,10 +18,17 @@ export function ScaleTable({ name, parts }: { name: string; parts: readonly Scal
           </tr>
         </thead>
         <tbody>
-          {parts.map(({ dayNumber, long }) => (
+          {parts.map(({ dayNumber, long, ownName }) => (
             <tr key={dayNumber}>
-              <th scope="row">{long}</th>
-              <td>{dates.day(dayNumber)}</td>
+              <th scope="row">
+                {ownName !== undefined && (
+                  <span className="own-words block" lang={lang}>
+                    {ownName}
+                  </span>
+                )}
+                {long}
+              </th>
+              <td>{dates.day(dayNumber, 'year')}</td>
             </tr>
           ))}
         </tbody>

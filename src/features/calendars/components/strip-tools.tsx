@@ -1,6 +1,6 @@
 import { ChevronLeft, ChevronRight } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import type { MonthDay } from '#shared/contracts/common.js';
+import type { Community } from '#shared/contracts/people.js';
 import { intlLocale, useDateWords } from '#src/lib/date-words.js';
 import { Button, IconButton } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
@@ -63,15 +63,17 @@ export function StripTools({ strip, unsavedCount, isSaving, onSaveAll }: StripTo
 
 interface StripSettingsProps {
   strip: Strip;
-  /** When the local year begins; null until it is known. */
-  yearStart: MonthDay | null;
+  /** Null until its settings are known. */
+  community: Community | null;
 }
 
 /** Where the year begins and what stands under the months, as somebody likes it on this device. */
-export function StripSettings({ strip, yearStart }: StripSettingsProps) {
+export function StripSettings({ strip, community }: StripSettingsProps) {
   const { t, i18n } = useTranslation('strip');
   const dates = useDateWords();
   const { settings, set } = strip;
+  const yearStart = community?.yearStart.date ?? null;
+  const hasMonths = (community?.localMonths.length ?? 0) > 0;
   return (
     <div className="grid gap-3 sm:grid-cols-2">
       {yearStart !== null && (
@@ -97,6 +99,9 @@ export function StripSettings({ strip, yearStart }: StripSettingsProps) {
       >
         <option value="none">{t('scale.none')}</option>
         <option value="moons">{t('scale.moons')}</option>
+        <option value="months" disabled={!hasMonths}>
+          {hasMonths ? t('scale.months') : t('monthsNotNamed')}
+        </option>
         <option value="market">{t('scale.market')}</option>
         <optgroup label={t('otherCalendars')}>
           {knownCalendars(intlLocale(i18n.language)).map(({ calendar, name }) => (

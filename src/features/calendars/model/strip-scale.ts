@@ -1,11 +1,18 @@
+import { localMonthStarts } from '#shared/calendar/local-months.js';
+import type { LocalMonth } from '#shared/contracts/local-months.js';
 import { dateOfDayNumber, utcDate } from '#src/lib/days.js';
 import type { DaySpan } from '#src/ui/pictures/day-span.js';
 import type { ScaleMonth } from '#src/ui/pictures/month-scale.js';
 
 /** A part of a second scale: a Moon, a market week, a month of another calendar. */
 export interface ScalePart extends ScaleMonth {
+  /** What it is in the reader's language; empty where its own name says all. */
   long: string;
+  /** What the village calls it, in its own language. */
+  ownName?: string;
 }
+
+type Start = Omit<ScalePart, 'days'>;
 
 export const MARKET_DAYS_MIN = 2;
 export const MARKET_DAYS_MAX = 20;
@@ -30,16 +37,28 @@ export function marketWeeks(
 }
 
 /** Runs from each start to the next one; what lies outside the span is left out. */
-export function runsFrom(
-  starts: readonly { dayNumber: number; short: string; narrow: string; long: string }[],
-  span: DaySpan,
-): ScalePart[] {
+export function runsFrom(starts: readonly Start[], span: DaySpan): ScalePart[] {
   return starts
     .map((start, index) => {
       const next = starts[index + 1]?.dayNumber ?? span.last + 1;
       return { ...start, days: Math.max(1, next - start.dayNumber) };
     })
     .filter(({ dayNumber, days }) => dayNumber <= span.last && dayNumber + days > span.first);
+}
+
+/** The village's own months; the first one may have begun before the span. */
+export function villageMonths(span: DaySpan, months: readonly LocalMonth[]): ScalePart[] {
+  const [from, to] = [dateOfDayNumber(span.first).year, dateOfDayNumber(span.last).year];
+  const starts = localMonthStarts(months, from - 1, to).map(({ dayNumber, name }) => ({
+    ...{ dayNumber, short: name, narrow: firstLetter(name), long: '', ownName: name },
+  }));
+  return runsFrom(starts, span);
+}
+
+/** With all marks that belong to it. */
+function firstLetter(name: string): string {
+  const [first] = new Intl.Segmenter().segment(name);
+  return first?.segment ?? '';
 }
 
 /** Every day of a span, for the closest look. */
@@ -58,7 +77,7 @@ export function civilMonths(span: DaySpan, calendar: string, locale: string): Sc
   const [short, narrow, long] = [format('short'), format('narrow'), format('long')];
   const monthIn = (parts: readonly Intl.DateTimeFormatPart[]) =>
     parts.find(({ type }) => type === 'month')?.value ?? '';
-  const starts: Omit<ScalePart, 'days'>[] = [];
+  const starts: Start[] = [];
   let before = '';
   for (let dayNumber = span.first; dayNumber <= span.last; dayNumber += 1) {
     const date = utcDate(dateOfDayNumber(dayNumber));

@@ -6,7 +6,7 @@ import { MARKET_DAYS_MAX, MARKET_DAYS_MIN } from './strip-scale.js';
 /** How somebody likes to read the strip of a village on this device. */
 const stripSettings = z.strictObject({
   yearFrom: z.enum(['civil', 'local']),
-  /** `none`, `moons`, `market`, or a calendar that the browser knows. */
+  /** `none`, `moons`, `months` of the village, `market`, or a calendar that the browser knows. */
   scale: z.string().max(40),
   marketDays: z.number().int().min(MARKET_DAYS_MIN).max(MARKET_DAYS_MAX),
   /** Any day on which there was a market. */

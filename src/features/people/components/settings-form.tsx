@@ -20,6 +20,7 @@ import { Care } from '#src/ui/surfaces.js';
 import { useToast } from '#src/ui/toast.js';
 import { useSaveCommunity } from '../api/people-mutations.js';
 import { isSettings, settingsOf } from '../model/settings-form.js';
+import { LocalMonthFields, MoonNameFields } from './local-month-fields.js';
 import { NewerSettings } from './newer-settings.js';
 import { ContactFields, NameFields, YearStartFields } from './settings-fields.js';
 import { RuleFields } from './rule-fields.js';
@@ -33,6 +34,8 @@ const FIELDS = [
   'yearStart.date.month',
   'yearStart.date.day',
   'yearStart.note',
+  'localMonths',
+  'moonNames',
   'weatherContact',
   'agricultureContact',
   'signOffRule',
@@ -117,10 +120,12 @@ export function SettingsForm({
         <div className="grid gap-4">
           <NameFields form={form} at={problems.at} />
           <YearStartFields form={form} at={problems.at} />
+          <LocalMonthFields form={form} at={problems.at} />
         </div>
         <div className="grid gap-4">
           <ContactFields form={form} at={problems.at} />
           <RuleFields form={form} at={problems.at} elders={elders} />
+          <MoonNameFields form={form} at={problems.at} />
         </div>
       </Columns>
       <ThumbBar

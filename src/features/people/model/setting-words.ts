@@ -4,6 +4,9 @@ import { useDateWords } from '#src/lib/date-words.js';
 import { listWords } from '#src/lib/list-words.js';
 import type { SettingGroup } from './settings-form.js';
 
+/** Any year that is no leap year: a yearly date exists in every year. */
+const ORDINARY_YEAR = 2027;
+
 /** Settings as a person says them. */
 export interface SettingWords {
   label: (field: SettingGroup) => string;
@@ -15,6 +18,8 @@ const LABELS = {
   villageLanguage: 'settings.villageLanguage',
   officerLanguage: 'settings.officerLanguage',
   yearStart: 'settings.yearStart',
+  localMonths: 'settings.localMonths',
+  moonNames: 'settings.moonNames',
   weatherContact: 'settings.weather',
   agricultureContact: 'settings.agriculture',
   signOffRule: 'settings.rule',
@@ -38,6 +43,8 @@ export function useSettingWords(elders: readonly CommunityPerson[]): SettingWord
     ]
       .filter((sentence) => sentence !== '')
       .join(' ');
+  const saidOr = (said: string[]) =>
+    said.length === 0 ? t('settings.notSet') : listWords(said, i18n.language);
   const language = ({ name, tag }: Language) => t('settings.language', { name, tag });
 
   return {
@@ -48,11 +55,22 @@ export function useSettingWords(elders: readonly CommunityPerson[]): SettingWord
         case 'officerLanguage':
           return language(settings[field]);
         case 'yearStart': {
-          // Any year that is no leap year: the date exists in every year.
-          const day = dates.day({ year: 2027, ...settings.yearStart.date });
+          const day = dates.day({ year: ORDINARY_YEAR, ...settings.yearStart.date });
           const { note } = settings.yearStart;
           return note === '' ? day : t('settings.yearStartSaid', { day, note });
         }
+        case 'localMonths':
+          return saidOr(
+            settings.localMonths.map(({ name, begins }) =>
+              t('settings.monthSaid', { name, day: dates.day({ year: ORDINARY_YEAR, ...begins }) }),
+            ),
+          );
+        case 'moonNames':
+          return saidOr(
+            settings.moonNames.flatMap((name, index) =>
+              name === '' ? [] : [t('settings.moonSaid', { nth: index + 1, name })],
+            ),
+          );
         case 'signOffRule':
           return ruleWords(settings.signOffRule);
         default:

@@ -21,6 +21,8 @@ export const SETTING_GROUPS = [
   'villageLanguage',
   'officerLanguage',
   'yearStart',
+  'localMonths',
+  'moonNames',
   'weatherContact',
   'agricultureContact',
   'signOffRule',

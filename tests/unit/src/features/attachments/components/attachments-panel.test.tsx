@@ -2,6 +2,7 @@ import 'fake-indexeddb/auto';
 import { screen, within } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import type { WordsInput } from '#shared/contracts/attachments.js';
+import { unnamedMoons } from '#shared/contracts/local-months.js';
 import type { Role } from '#shared/contracts/people.js';
 import type { SessionState } from '#shared/contracts/session.js';
 import { AttachmentsPanel } from '#src/features/attachments/components/attachments-panel.js';
@@ -20,6 +21,8 @@ const COMMUNITY = {
     villageLanguage: { tag: 'art-x-tazimel', name: 'Tazimeli' },
     officerLanguage: { tag: 'en', name: 'English' },
     yearStart: { date: { month: 6, day: 8 }, note: '' },
+    localMonths: [],
+    moonNames: unnamedMoons(),
     weatherContact: '',
     agricultureContact: '',
     signOffRule: { minElders: 1, mustSign: [], oneOf: [], steward: false },

@@ -6,7 +6,9 @@ import {
   knownCalendars,
   marketWeeks,
   runsFrom,
+  villageMonths,
 } from '#src/features/calendars/model/strip-scale.js';
+import type { DaySpan } from '#src/ui/pictures/day-span.js';
 
 const span = { first: dayNumberFromIso('2027-01-01'), last: dayNumberFromIso('2027-12-31') };
 const named = (firstDay: number, number: number) => ({
@@ -33,6 +35,37 @@ describe('runs from day to day', () => {
       ['2027-05-07', 30],
       ['2027-06-06', 29],
     ]);
+  });
+});
+
+describe('months of a village', () => {
+  const months = [
+    { name: 'Ŋɔ́rɛ̃', begins: { month: 6, day: 8 } },
+    { name: 'ɓèŋu̍', begins: { month: 12, day: 28 } },
+  ];
+  const runs = (year: DaySpan) =>
+    villageMonths(year, months).map(({ dayNumber, days, ownName }) => [isoDateOf(dayNumber), days, ownName]);
+
+  it('reach from day to day, the one that runs at New Year included', () => {
+    expect(runs(span)).toEqual([
+      ['2026-12-28', 162, 'ɓèŋu̍'],
+      ['2027-06-08', 203, 'Ŋɔ́rɛ̃'],
+      ['2027-12-28', 4, 'ɓèŋu̍'],
+    ]);
+  });
+
+  it('fill a year that begins with the village’s', () => {
+    const own = { first: dayNumberFromIso('2027-06-08'), last: dayNumberFromIso('2028-06-07') };
+    expect(runs(own)).toEqual([
+      ['2027-06-08', 203, 'Ŋɔ́rɛ̃'],
+      ['2027-12-28', 163, 'ɓèŋu̍'],
+    ]);
+  });
+
+  it('shorten to the first letter with its marks', () => {
+    expect(villageMonths(span, months).map(({ narrow }) => narrow)).toEqual(['ɓ', 'Ŋ', 'ɓ']);
+    const [marked] = villageMonths(span, [{ name: 'ɛ̃́lo', begins: { month: 1, day: 1 } }]);
+    expect(marked?.narrow).toBe('ɛ̃́');
   });
 });
 
