@@ -189,7 +189,7 @@ export function changedEdit(
   const saved = 'content' in from ? from : null;
   const beginning = 'content' in from ? draftOf(from.content) : from;
   const start = before?.draft ?? beginning;
-  const draft = { ...start, ...(typeof change === 'function' ? change(start) : change) };
+  const draft = withoutUnsaid({ ...start, ...(typeof change === 'function' ? change(start) : change) });
   const base = before ? before.base : (saved?.content ?? null);
   const baseVersion = before ? before.baseVersion : (saved?.version ?? null);
   // Written back to what is saved now: nothing is unsaved any more. Over an older state it must still be decided.
@@ -200,4 +200,9 @@ export function changedEdit(
   const sending = before?.sending;
   if (isBack && sending === undefined) return null;
   return { draft, base, baseVersion, keptAt: now.toISOString(), ...(sending ? { sending } : {}) };
+}
+
+/** A member that a change sets to undefined is taken out, such as a word of the village's own. */
+function withoutUnsaid(draft: EntryDraft): EntryDraft {
+  return Object.fromEntries(Object.entries(draft).filter(([, said]) => said !== undefined)) as typeof draft;
 }

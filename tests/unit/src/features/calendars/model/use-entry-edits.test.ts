@@ -36,6 +36,17 @@ describe('writing over a saved entry', () => {
 });
 
 describe('a new entry', () => {
+  it('takes a kind of the product as well as a word of the village, and gives the word back', () => {
+    const kindWord = { id: '0b9f3c1e-6f57-4c39-9b0e-2f6d7a1c5e11', word: 'Work of the water' };
+    const own = changedEdit(undefined, newDraft(), { kind: 'safety', kindWord }, now) ?? undefined;
+    expect(own?.draft).toMatchObject({ kind: 'safety', kindWord });
+    const plain =
+      changedEdit(own, newDraft(), { kind: 'herd-fish-gather', kindWord: undefined }, now) ?? undefined;
+    expect(plain?.draft.kind).toBe('herd-fish-gather');
+    expect(plain?.draft).not.toHaveProperty('kindWord');
+    expect(changedEdit(plain, newDraft(), { kind: 'farm', kindWord: undefined }, now)).toBeNull();
+  });
+
   it('is kept from the first change on and has no state that it is written over', () => {
     const start = newDraft({
       type: 'marker',
