@@ -12,6 +12,10 @@ export interface ImportWords {
   phenomena: Readonly<Record<Phenomenon, readonly string[]>>;
   /** Before a day of the civil year, such as `Fixed date: 07-05`. */
   fixedDate: readonly string[];
+  /** Other ways to write a day of a month, and its parts of ten days: `day`, `tenDays` `first`, `second`, `third`. */
+  days: readonly ImportPhrase[];
+  /** Ways to say days `before` and `after` a sign. */
+  offsets: readonly ImportPhrase[];
   /** Ways to name signs beyond a star's first and last days, and days of other entries. */
   phrases: readonly ImportPhrase[];
 }
@@ -54,14 +58,15 @@ const OFFSET = /^(.*?)\s*([+\-−])\s*(\d{1,3})$/u;
 const OFFSET_APART = /^(.*\S)\s+([+\-−])\s*(\d{1,3})$/u;
 /** Longer than any sign is called; what is longer is not held against all that a sign may be called. */
 const SIGN_WORDS_MAX = 300;
-const TEN_DAY_PARTS = 3;
+const TEN_DAY_NAMES: readonly string[] = ['first', 'second', 'third'];
+const TEN_DAY_PARTS = TEN_DAY_NAMES.length;
 const TEN_DAY_PARTS_OF_YEAR = 36;
 const ONLY_SLASH_MONTHS = 12;
 
 /**
  * Reads one cell of a table as a day: `2027-06-14`, `06-14`, `14.6.`, `14/6`, `14 June`, `June 14`; as a ten-day part,
  * `June 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign, `Pleiades first morning +7`, `Belt due
- * south at 21:00`, `actual date of A04 +19`. A month's name with 1, 2 or 3 behind it is always a ten-day part; the second
+ * south at 21:00`, `actual date of A04 +19`, `7 days before June solstice`. A month's name with 1, 2 or 3 behind it is always a ten-day part; the second
  * of June is `2 June`.
  *
  * @returns what the cell says, or what is the matter with it; never throws
@@ -74,9 +79,15 @@ export function dateCell(text: string, facts: ImportDateFacts): DateCell {
   );
 }
 
-/** Words as they are compared: composed, small, one space between, no article before. */
+/** Words as they are compared: composed, small, one space between, one kind of apostrophe, no article before. */
 export function plainWords(text: string): string {
-  return text.normalize('NFC').toLowerCase().replace(/\s+/gu, ' ').trim().replace(/^the /u, '');
+  return text
+    .normalize('NFC')
+    .toLowerCase()
+    .replace(/['ʼ]/gu, '’')
+    .replace(/\s+/gu, ' ')
+    .trim()
+    .replace(/^the /u, '');
 }
 
 function withoutFixed(words: string, { fixedDate }: ImportWords): string {
@@ -86,7 +97,7 @@ function withoutFixed(words: string, { fixedDate }: ImportWords): string {
 
 function dayCell(
   words: string,
-  { words: { months }, dayOrder, calendarYear }: ImportDateFacts,
+  { words: { months, days }, dayOrder, calendarYear }: ImportDateFacts,
 ): DateCell | null {
   const day = (month: string | number, dayOfMonth: string, year?: string): DateCell =>
     oneDay(Number(month), Number(dayOfMonth), year === undefined ? null : Number(year), calendarYear);
@@ -114,6 +125,13 @@ function dayCell(
     if (number > TEN_DAY_PARTS || monthFirst[3] !== undefined)
       return day(month, monthFirst[2] ?? '', monthFirst[3]);
     return tenDayPart((month - 1) * TEN_DAY_PARTS + number);
+  }
+  const said = saidBy(words, days);
+  const monthSaid = said === null ? 0 : monthOf(plainWords(said.holes.month ?? '').replace(/\.$/u, ''));
+  if (said !== null && monthSaid > 0) {
+    const [head = '', part = ''] = said.path;
+    if (head === 'day') return day(monthSaid, said.holes.day ?? '', said.holes.year);
+    return tenDayPart((monthSaid - 1) * TEN_DAY_PARTS + TEN_DAY_NAMES.indexOf(part) + 1);
   }
   // Digits alone, or nothing but digits and their marks, are no sign either.
   return /^[\d\s./-]+$/u.test(words) ? { kind: 'problem', problem: 'date-not-read' } : null;
@@ -153,6 +171,12 @@ function tenDayPart(number: number): DateCell {
 
 function signCell(text: string, facts: ImportDateFacts): DateCell {
   if (text.length > SIGN_WORDS_MAX) return { kind: 'problem', problem: 'unknown-sign-words' };
+  const counted = saidBy(text, facts.words.offsets);
+  if (counted !== null) {
+    const of = signCell(counted.holes.sign ?? '', facts);
+    const days = Number(counted.holes.count) * (counted.path[0] === 'after' ? 1 : -1);
+    return of.kind === 'sign' ? { ...of, offsetDays: of.offsetDays + days } : of;
+  }
   const apart = offsetBehind(OFFSET_APART, text);
   for (const { name, offsetDays } of [apart, { name: text, offsetDays: 0 }]) {
     const said = saidBy(name, facts.words.phrases);

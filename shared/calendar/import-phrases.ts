@@ -15,6 +15,10 @@ export type PhraseHole =
   | 'depth'
   | 'altitude'
   | 'count'
+  | 'day'
+  | 'month'
+  | 'year'
+  | 'sign'
   | 'number'
   | 'azimuth'
   | 'compass'
@@ -36,9 +40,10 @@ export interface PhraseTree {
 const HOLE = /\{\{(\w+)\}\}/u;
 const PLURAL = /_(?:zero|one|two|few|many|other)$/u;
 const NUMBER = String.raw`\d{1,3}(?:[.,]\d+)?`;
-/** Holes that hold figures; all others hold words. */
+/** Holes that hold figures or one word; all others hold words. */
 const FIGURES: Readonly<Record<string, string>> = {
   hour: String.raw`\d{1,2}(?:[:.]\d{2})?`,
+  ...{ day: String.raw`\d{1,2}`, month: String.raw`\p{L}+\.?`, year: String.raw`\d{4}` },
   ...{ depth: NUMBER, altitude: NUMBER, azimuth: NUMBER, count: NUMBER, number: NUMBER },
 };
 

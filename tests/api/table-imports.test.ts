@@ -8,8 +8,7 @@ import { CalendarEntity } from '#server/db/entities/calendar.entity.js';
 import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
 import { daysBetween } from '#shared/kernel/iso-date.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
-import { en } from '#shared/locales/index.js';
-import { columnWordsOf } from '#src/features/imports/model/column-words.js';
+import { wordsOfTables } from '#src/features/imports/model/table-languages.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
 import { readTable } from '#src/features/imports/model/read-table.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -51,10 +50,10 @@ const send = (calendarId: string, body: TableInput, client: Client = village.off
 const sent = async (calendarId: string, body: TableInput, key = randomUUID()) =>
   (await send(calendarId, body, village.officer, key).expect(200)).body as TableImport;
 
-const { titlesOf } = columnWordsOf([en]);
+const { titles } = wordsOfTables('en');
 const linesOf = (text: string) => {
   const table = readTable(text);
-  return matchedLines(table, guessColumns(table.titles, titlesOf));
+  return matchedLines(table, guessColumns(table.titles, titles));
 };
 
 describe('a table', () => {

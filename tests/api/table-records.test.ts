@@ -8,7 +8,10 @@ import type { TableImport, TableLine } from '#shared/contracts/imports.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { en } from '#shared/locales/index.js';
-import { columnWordsOf } from '#src/features/imports/model/column-words.js';
+import { TABLE_LANGUAGES, tableTexts, type TableLanguage } from '#shared/locales/tables.js';
+import { tableLanguageOf, wordsOfTables } from '#src/features/imports/model/table-languages.js';
+import { templateCsv } from '#src/features/imports/model/template.js';
+import type { ColumnTexts } from '#src/features/imports/model/column-words.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
 import { readTable } from '#src/features/imports/model/read-table.js';
 import { openTestApi, type TestApi } from '#tests/support/api.js';
@@ -35,10 +38,10 @@ beforeAll(async () => {
 afterAll(() => api.close());
 
 const begin = async () => (await beginCalendar(village, (years += 1))).id;
-const { titlesOf } = columnWordsOf([en]);
 const linesOf = (text: string) => {
   const table = readTable(text);
-  return matchedLines(table, guessColumns(table.titles, titlesOf));
+  const { titles } = wordsOfTables(tableLanguageOf(table.titles, 'en'));
+  return matchedLines(table, guessColumns(table.titles, titles));
 };
 const send = async (calendarId: string, lines: TableLine[], dryRun = false) => {
   const body = { dryRun, dayOrder: null, natureSigns: [], lines };
@@ -155,6 +158,26 @@ describe('a table of our own', () => {
     const { version } = (await officer.get(path).expect(200)).body as { version: number };
     await officer.put(path, { sharing: { level: 'elders', ...PLAIN_DETAILS }, version }).expect(200);
     expect(await exported(calendarId)).not.toContain('The hidden bird');
+  });
+});
+
+describe.each(TABLE_LANGUAGES)('the empty table in %s', (language: TableLanguage) => {
+  it('comes in as its examples say, and what is exported of it comes back equal', async () => {
+    const { titleOf } = wordsOfTables(language);
+    const { template }: ColumnTexts = tableTexts[language];
+    const lines = Object.values(template.lines);
+    const from = await begin();
+    await send(from, linesOf(templateCsv(titleOf, lines)));
+    const into = await begin();
+    await send(into, linesOf(await exported(from)));
+    const before = (await entriesOf(village.officer, from)).map(plain);
+    const after = (await entriesOf(village.officer, into)).map(plain);
+    // Which entry is meant is said by its number; ids are each draft's own.
+    const withoutId = (contents: typeof before) =>
+      contents.map((content) => ({ ...content, lead: { ...content.lead, entryId: '' } }));
+    expect(before).toHaveLength(lines.length);
+    expect(withoutId(after)).toEqual(withoutId(before));
+    expect(before.map(({ titleOfficer }) => titleOfficer)).toEqual(lines.map((each) => each.titleOfficer));
   });
 });
 

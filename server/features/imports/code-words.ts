@@ -1,4 +1,5 @@
 import { plainWords } from '#shared/calendar/import-dates.js';
+import type { PhraseTree } from '#shared/calendar/import-phrases.js';
 import {
   BASES,
   CONFIDENCES,
@@ -57,8 +58,19 @@ export function namesOf(list: string): string[] {
   return [...new Set([...names, ...names.map(withoutAccents)])];
 }
 
+/** Ways to say things, each also without its accents. */
+export function inPlainLetters(tree: PhraseTree): PhraseTree {
+  return Object.fromEntries(
+    Object.entries(tree).map(([part, said]): [string, string | PhraseTree] => {
+      if (typeof said !== 'string') return [part, inPlainLetters(said)];
+      const plain = withoutAccents(said);
+      return [part, plain === said ? said : `${said}|${plain}`];
+    }),
+  );
+}
+
 /** Only of the product's own words: in a village's, a mark may make another word. */
-export function withoutAccents(text: string): string {
+function withoutAccents(text: string): string {
   return text
     .normalize('NFD')
     .replace(/\p{Mn}/gu, '')

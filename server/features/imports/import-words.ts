@@ -7,9 +7,10 @@ import type { VillageWord } from '#shared/contracts/village-word.js';
 import type { SkyFigure } from '#shared/contracts/stars.js';
 import { resources } from '#shared/locales/index.js';
 import { DEFAULT_LANGUAGE, LANGUAGES } from '#shared/locales/languages.js';
+import { TABLE_LANGUAGES, tableTexts } from '#shared/locales/tables.js';
 import { PHENOMENA, type Phenomenon } from '#shared/sky/index.js';
 import type { KnownWords } from '../word-lists/known-words.service.js';
-import { namesOf, tableCodes, type CodeWords, type TableCodes } from './code-words.js';
+import { inPlainLetters, namesOf, tableCodes, type CodeWords, type TableCodes } from './code-words.js';
 
 /** Of one language, what its files say by which a table may be written. */
 export interface ImportLocale {
@@ -17,18 +18,22 @@ export interface ImportLocale {
     months: string;
     phenomena: Readonly<Record<Phenomenon, string>>;
     fixedDate: string;
-    figures: Readonly<Record<string, string>>;
+    days: PhraseTree;
+    offsets: PhraseTree;
+    figures: Readonly<Partial<Record<string, string>>>;
     phrases: PhraseTree;
     kinds: Readonly<Record<EntryKind, string>>;
     yes: string;
     codes: CodeWords;
   };
-  /** Names that the product itself gives to codes. */
-  codeNames: CodeWords;
-  kindNames: Readonly<Record<EntryKind, string>>;
-  phenomenonNames: Readonly<Record<Phenomenon, string>>;
-  /** Names that the product itself gives to signs of the sky. */
-  signNames: PhraseTree;
+  /** Names that the product itself gives, where its screens speak the language. */
+  names?: {
+    codes: CodeWords;
+    kinds: Readonly<Record<EntryKind, string>>;
+    phenomena: Readonly<Record<Phenomenon, string>>;
+    /** Of signs of the sky. */
+    signs: PhraseTree;
+  };
 }
 
 /** What tables may say, in every language at once: a village's table is in whichever its people write. */
@@ -47,57 +52,68 @@ export function tableWordsOf(locales: readonly ImportLocale[]): TableWords {
     dates: {
       months: Array.from({ length: 12 }, (_, month) => months.flatMap((each) => each[month] ?? [])),
       phenomena: byWord(PHENOMENA, (phenomenon) =>
-        locales.flatMap(({ words, phenomenonNames }) => [
-          plainWords(phenomenonNames[phenomenon]),
+        locales.flatMap(({ words, names }) => [
+          ...(names ? [plainWords(names.phenomena[phenomenon])] : []),
           ...namesOf(words.phenomena[phenomenon]),
         ]),
       ),
       fixedDate: locales.flatMap(({ words }) => namesOf(words.fixedDate)),
-      phrases: phrasesOf(...locales.flatMap(({ words, signNames }) => [signNames, words.phrases])),
+      days: phrasesOf(...locales.map(({ words }) => inPlainLetters(words.days))),
+      offsets: phrasesOf(...locales.map(({ words }) => inPlainLetters(words.offsets))),
+      phrases: phrasesOf(
+        ...locales.flatMap(({ words, names }) => [names?.signs ?? {}, inPlainLetters(words.phrases)]),
+      ),
     },
     kinds: new Map([
       ...ENTRY_KINDS.map((kind) => [kind, kind] as const),
-      ...locales.flatMap(({ words, kindNames }) =>
+      ...locales.flatMap(({ words, names }) =>
         ENTRY_KINDS.flatMap((kind) =>
-          [plainWords(kindNames[kind]), ...namesOf(words.kinds[kind])].map((name) => [name, kind] as const),
+          [...(names ? [plainWords(names.kinds[kind])] : []), ...namesOf(words.kinds[kind])].map(
+            (name) => [name, kind] as const,
+          ),
         ),
       ),
     ]),
-    codes: tableCodes(locales.flatMap(({ words, codeNames }) => [codeNames, words.codes])),
+    codes: tableCodes(locales.flatMap(({ words, names }) => [names?.codes ?? {}, words.codes])),
     yes: new Set(locales.flatMap(({ words }) => namesOf(words.yes))),
     figures: new Map(
       locales.flatMap(({ words }) =>
         Object.entries(words.figures).flatMap(([key, list]) =>
-          namesOf(list).map((name) => [name, key] as const),
+          namesOf(list ?? '').map((name) => [name, key] as const),
         ),
       ),
     ),
   };
 }
 
-/** Of the languages that are there. */
+/** Of every language in which a table may be written. */
 export const TABLE_WORDS = tableWordsOf(
-  LANGUAGES.map((language) => {
-    const { imports, calendars, record, sky } = resources[language];
+  TABLE_LANGUAGES.map((language): ImportLocale => {
+    const { words } = tableTexts[language];
+    const ofScreens = LANGUAGES.find((each) => each === language);
+    if (ofScreens === undefined) return { words };
+    const { calendars, record, sky } = resources[ofScreens];
     return {
-      words: imports.words,
-      codeNames: {
-        operations: record.operation,
-        repeats: record.repeats,
-        confidences: record.confidence,
-        bases: record.basis,
-        signTypes: record.signs.type,
-        stillSeen: record.signs.stillSeen,
+      words,
+      names: {
+        codes: {
+          operations: record.operation,
+          repeats: record.repeats,
+          confidences: record.confidence,
+          bases: record.basis,
+          signTypes: record.signs.type,
+          stillSeen: record.signs.stillSeen,
+        },
+        kinds: calendars.kind,
+        phenomena: sky.phenomenon,
+        signs: sky.sign,
       },
-      kindNames: calendars.kind,
-      phenomenonNames: sky.phenomenon,
-      signNames: sky.sign,
     };
   }),
 );
 
 /** Who is said to set a day that a table gives without saying so. */
-export const DAY_SOURCE = resources[DEFAULT_LANGUAGE].imports.words.source;
+export const DAY_SOURCE = tableTexts[DEFAULT_LANGUAGE].words.source;
 
 /** What a village calls kinds of events, by plain words. */
 export type VillageKinds = ReadonlyMap<string, { kind: EntryKind; kindWord: VillageWord }>;

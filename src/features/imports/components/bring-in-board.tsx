@@ -1,18 +1,16 @@
-import { Download } from 'lucide-react';
 import { useId, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import { CALENDAR_FILE_MAX_BYTES } from '#shared/contracts/calendar-file.js';
 import { IMPORT_LINES_MAX } from '#shared/contracts/imports.js';
 import { paths } from '#src/lib/paths.js';
-import { Button, ButtonLink } from '#src/ui/button.js';
+import { ButtonLink } from '#src/ui/button.js';
 import { FieldFrame } from '#src/ui/field.js';
 import { Board, Care } from '#src/ui/surfaces.js';
 import { readTable, utf8TextOf, type SavedTable } from '../model/read-table.js';
-import { templateCsv } from '../model/template.js';
-import { useImportColumnWords } from '../model/use-import-words.js';
 import { FileImportSteps } from './file-import-steps.js';
 import { TableImportSteps } from './table-import-steps.js';
+import { TemplateChoice } from './template-choice.js';
 
 type Chosen =
   | { kind: 'file'; key: string; file: File }
@@ -25,7 +23,6 @@ export function BringInBoard({ calendar }: { calendar: Calendar }) {
   const fileId = useId();
   const [chosen, setChosen] = useState<Chosen | null>(null);
   const [added, setAdded] = useState<number | null>(null);
-  const { titleOf, examples } = useImportColumnWords();
   if (calendar.locked) {
     return (
       <Board title={t('bring.title')}>
@@ -45,17 +42,7 @@ export function BringInBoard({ calendar }: { calendar: Calendar }) {
   return (
     <Board title={t('bring.title')}>
       <p className="text-small">{t('bring.what')}</p>
-      <p className="mt-3">
-        <Button
-          look="quiet"
-          icon={<Download aria-hidden size={20} />}
-          onClick={() => {
-            download(t('template.fileName'), templateCsv(titleOf, examples));
-          }}
-        >
-          {t('bring.template')}
-        </Button>
-      </p>
+      <TemplateChoice />
       <FieldFrame inputId={fileId} label={t('bring.file')} hint={t('bring.fileHint')} className="mt-3">
         <input
           id={fileId}
@@ -119,13 +106,4 @@ async function look(file: File): Promise<Exclude<Chosen, { kind: 'problem' }> | 
   if (table.lines.length === 0) return unfit('bring.noLines');
   if (table.lines.length > IMPORT_LINES_MAX) return unfit('bring.tooMany', table.lines.length);
   return { kind: 'table', key, table };
-}
-
-function download(name: string, text: string): void {
-  const address = URL.createObjectURL(new Blob([text], { type: 'text/csv;charset=utf-8' }));
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = name;
-  link.click();
-  URL.revokeObjectURL(address);
 }

@@ -3,7 +3,7 @@ import { IMPORT_COLUMNS, type ImportColumn, type TableInput } from '#shared/cont
 import { SelectField } from '#src/ui/field.js';
 import type { Matching } from '../model/match-columns.js';
 import type { SavedTable } from '../model/read-table.js';
-import { useImportColumnWords } from '../model/use-import-words.js';
+import { ownTableLanguage, wordsOfTables } from '../model/table-languages.js';
 
 const ORDERS = ['day-first', 'month-first'] as const;
 
@@ -17,8 +17,8 @@ interface MatchFieldsProps {
 
 /** One choice for each column of the table, with what stands in it. */
 export function MatchFields({ table, matching, dayOrder, onMatch, onOrder }: MatchFieldsProps) {
-  const { t } = useTranslation('imports');
-  const { titleOf } = useImportColumnWords();
+  const { t, i18n } = useTranslation('imports');
+  const { titleOf } = wordsOfTables(ownTableLanguage(i18n.resolvedLanguage));
   return (
     <div className="grid gap-3">
       <h3>{t('match.title')}</h3>

@@ -2,7 +2,7 @@ import { FileInput } from 'lucide-react';
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import type { Calendar } from '#shared/contracts/calendars.js';
-import type { ReadLine } from '#shared/contracts/imports.js';
+import type { ImportColumn, ReadLine } from '#shared/contracts/imports.js';
 import { markersQuery } from '#src/lib/calendar-queries.js';
 import type { NamesByKey } from '#src/lib/marker-names.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
@@ -11,17 +11,18 @@ import { Button } from '#src/ui/button.js';
 import { Care } from '#src/ui/surfaces.js';
 import { Table } from '#src/ui/table.js';
 import { LandingDays } from './landing-days.js';
-import { useImportColumnWords } from '../model/use-import-words.js';
 
 interface ReadLinesProps {
   lines: readonly ReadLine[];
+  /** As the table calls its column. */
+  columnName: (column: ImportColumn) => string;
   calendar: Pick<Calendar, 'placeId' | 'year'>;
   isBusy: boolean;
   onBring: () => void;
 }
 
 /** What every line becomes, or what is the matter with it; those that need another look come first. */
-export function ReadLines({ lines, calendar, isBusy, onBring }: ReadLinesProps) {
+export function ReadLines({ lines, columnName, calendar, isBusy, onBring }: ReadLinesProps) {
   const { t } = useTranslation('imports');
   const { placeId, year } = calendar;
   const markers = useQuery(markersQuery(placeId, year)).data?.byKey ?? NO_NAMES;
@@ -51,7 +52,7 @@ export function ReadLines({ lines, calendar, isBusy, onBring }: ReadLinesProps) 
               <td>{line.line}</td>
               <th scope="row">{line.title}</th>
               <td>
-                <Becomes line={line} year={year} markers={markers} />
+                <Becomes line={line} columnName={columnName} year={year} markers={markers} />
               </td>
             </tr>
           ))}
@@ -73,22 +74,22 @@ const NO_NAMES: NamesByKey = new Map();
 
 interface BecomesProps {
   line: ReadLine;
+  columnName: ReadLinesProps['columnName'];
   year: number;
   markers: NamesByKey;
 }
 
 /** Its days, and how its words were understood: what it goes by. */
-function Becomes({ line, year, markers }: BecomesProps) {
+function Becomes({ line, columnName, year, markers }: BecomesProps) {
   const { t } = useTranslation('imports');
   const words = useEntryWords();
   const problems = useProblemWords();
-  const { titleOf } = useImportColumnWords();
   if (line.problems.length > 0) {
     return (
       <ul className="grid gap-1">
         {line.problems.map(({ column, code }) => (
           <li key={`${column} ${code}`}>
-            {t('lines.problem', { column: titleOf(column), remedy: problems.field(code) })}
+            {t('lines.problem', { column: columnName(column), remedy: problems.field(code) })}
           </li>
         ))}
       </ul>

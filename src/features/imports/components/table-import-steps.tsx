@@ -1,8 +1,9 @@
 import { ListChecks } from 'lucide-react';
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Calendar } from '#shared/contracts/calendars.js';
-import type { TableInput } from '#shared/contracts/imports.js';
+import type { ImportColumn, TableInput } from '#shared/contracts/imports.js';
+import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import { keep, readKept } from '#src/lib/device-storage.js';
 import { Button } from '#src/ui/button.js';
 import { useTableImport } from '../api/imports-api.js';
@@ -16,7 +17,7 @@ import {
 import type { SavedTable } from '../model/read-table.js';
 import { wordsNobodyKnows } from '../model/unknown-words.js';
 import { isExample } from '../model/template.js';
-import { useImportColumnWords } from '../model/use-import-words.js';
+import { tableLanguageOf, wordsOfTables } from '../model/table-languages.js';
 import { useStoppable } from '../model/use-stoppable.js';
 import { LongWork } from './long-work.js';
 import { MatchFields } from './match-fields.js';
@@ -33,11 +34,15 @@ interface TableImportStepsProps {
 
 /** A table: which column is what, what each line becomes, then bringing all of them in. */
 export function TableImportSteps({ calendar, importKey, table, onDone }: TableImportStepsProps) {
-  const { t } = useTranslation('imports');
-  const { titlesOf, examples } = useImportColumnWords();
+  const { t, i18n } = useTranslation('imports');
+  const own = i18n.resolvedLanguage ?? DEFAULT_LANGUAGE;
+  const { titles, examples, titleOf } = useMemo(
+    () => wordsOfTables(tableLanguageOf(table.titles, own)),
+    [table.titles, own],
+  );
   const keptAt = `import-columns.${table.titles.join('|')}`;
   const [matching, setMatching] = useState<Matching>(
-    () => keptMatching(readKept(keptAt), table.titles) ?? guessColumns(table.titles, titlesOf),
+    () => keptMatching(readKept(keptAt), table.titles) ?? guessColumns(table.titles, titles),
   );
   const [dayOrder, setDayOrder] = useState<TableInput['dayOrder']>(null);
   /** Words that no list knows, as they came up when the lines were looked at; and which of them are signs of nature. */
@@ -50,6 +55,11 @@ export function TableImportSteps({ calendar, importKey, table, onDone }: TableIm
   const all = matchedLines(table, matching);
   const lines = all.filter((line) => !isExample(line, examples));
   const send = { key: importKey, dayOrder, lines, natureSigns: [...natureSigns] };
+  /** As the table itself calls it, where it has the column. */
+  const columnName = (column: ImportColumn) => {
+    const title = table.titles[matching.indexOf(column)] ?? '';
+    return title === '' ? titleOf(column) : title;
+  };
   const changed = (change: () => void) => {
     change();
     look.reset();
@@ -110,6 +120,7 @@ export function TableImportSteps({ calendar, importKey, table, onDone }: TableIm
       {look.data && (
         <ReadLines
           lines={look.data.lines}
+          columnName={columnName}
           calendar={calendar}
           isBusy={bring.isPending}
           onBring={() => {

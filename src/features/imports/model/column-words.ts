@@ -1,44 +1,88 @@
-import type { ImportColumn } from '#shared/contracts/imports.js';
+import { IMPORT_COLUMNS, type ImportColumn } from '#shared/contracts/imports.js';
 import type { ExampleLine } from './template.js';
 
-/** How columns are called, what else they may be called, and the lines of the template. */
+/** What one language says of columns: how each is called, what else it may be called (a line parts them), and lines of the template. */
+export interface ColumnTexts {
+  column: Partial<Record<ImportColumn, string>>;
+  alias: Partial<Record<ImportColumn, string>>;
+  template: { lines: Readonly<Record<string, ExampleLine>> };
+}
+
+/** A title under which a column may stand. */
+export type KnownTitle = readonly [title: string, column: ImportColumn];
+
+/** How columns are called, and all other titles under which they may stand. */
 export interface ImportColumnWords {
   titleOf: (column: ImportColumn) => string;
-  titlesOf: (column: ImportColumn) => readonly string[];
+  /** What comes first counts. */
+  titles: readonly KnownTitle[];
+  /** Of the templates of every language. */
   examples: readonly ExampleLine[];
 }
 
-/** What one language says of columns; what it lacks is left out. */
-export interface ColumnTexts {
-  imports: {
-    column?: { when?: string };
-    alias?: Partial<Record<ImportColumn, string>>;
-    template?: { lines?: Readonly<Record<string, ExampleLine>> };
-  };
-  files: { calendarCsv?: { column?: Partial<Record<ImportColumn, string>> } };
-}
-
 /**
- * Words for a person who reads in one language, where tables may be in any: the first language gives titles and template, a
- * title of every language is known. What the first one lacks comes from those behind it.
- * @param languages that of the person first, the one that is complete last
+ * Words for tables of one language where those of others are known, too: the first language names the columns, and its titles
+ * come before those of the others. What it lacks comes from those behind it.
+ * @param languages that of the table first
  */
 export function columnWordsOf(languages: readonly ColumnTexts[]): ImportColumnWords {
-  const titleIn = ({ imports, files }: ColumnTexts, column: ImportColumn) =>
-    column === 'when' ? imports.column?.when : files.calendarCsv?.column?.[column];
-  const titlesIn = (texts: ColumnTexts, column: ImportColumn) => [
-    titleIn(texts, column) ?? '',
-    ...(texts.imports.alias?.[column] ?? '').split('|'),
-  ];
-  const titlesOf = (column: ImportColumn) =>
-    languages
-      .flatMap((texts) => titlesIn(texts, column))
-      .map((title) => title.trim())
-      .filter((title) => title !== '');
-  const lines = languages.find(({ imports }) => imports.template?.lines !== undefined)?.imports.template;
   return {
-    titleOf: (column) => titlesOf(column)[0] ?? column,
-    titlesOf,
-    examples: Object.values(lines?.lines ?? {}),
+    titleOf: (column) => languages.map((texts) => texts.column[column]).find(isSaid) ?? column,
+    titles: [
+      ...languages.flatMap((texts) => [...ownTitles(texts), ...otherTitles(texts)]),
+      ...IMPORT_COLUMNS.map((column) => [column, column] as const),
+    ],
+    examples: languages.flatMap(({ template }) => Object.values(template.lines)),
   };
+}
+
+/** The language in which most titles of a table are; of several the first. */
+export function languageOfTitles<L extends string>(
+  titles: readonly string[],
+  languages: readonly L[],
+  texts: Readonly<Record<L, ColumnTexts>>,
+): L | undefined {
+  const there = new Set(titles.map(plainTitle));
+  const counted = languages.map((language) => ({
+    language,
+    count: new Set(
+      [...ownTitles(texts[language]), ...otherTitles(texts[language])]
+        .map(([title]) => plainTitle(title))
+        .filter((title) => there.has(title)),
+    ).size,
+  }));
+  const most = Math.max(...counted.map(({ count }) => count));
+  return counted.find(({ count }) => count === most)?.language;
+}
+
+/** `Window_early` and `window early` are one title, and so are those with and without their accents. */
+export function plainTitle(title: string): string {
+  return title
+    .normalize('NFD')
+    .replace(/\p{Mn}/gu, '')
+    .toLowerCase()
+    .replace(/['ʼ]/gu, '’')
+    .replace(/[\s_-]+/gu, ' ')
+    .trim();
+}
+
+function ownTitles({ column }: ColumnTexts): KnownTitle[] {
+  return IMPORT_COLUMNS.flatMap((each) => {
+    const title = column[each];
+    return isSaid(title) ? [[title, each] as const] : [];
+  });
+}
+
+function otherTitles({ alias }: ColumnTexts): KnownTitle[] {
+  return IMPORT_COLUMNS.flatMap((each) =>
+    (alias[each] ?? '')
+      .split('|')
+      .map((title) => title.trim())
+      .filter(isSaid)
+      .map((title) => [title, each] as const),
+  );
+}
+
+function isSaid(title: string | undefined): title is string {
+  return title !== undefined && title !== '';
 }

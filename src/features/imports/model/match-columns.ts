@@ -1,20 +1,16 @@
 import { IMPORT_COLUMNS, type ImportColumn, type TableLine } from '#shared/contracts/imports.js';
+import { plainTitle, type KnownTitle } from './column-words.js';
 import type { SavedTable } from './read-table.js';
 
 /** For each column of a table, what it is; null for what is left out. */
 export type Matching = readonly (ImportColumn | null)[];
 
-/** All titles that a column may stand under. */
-export type TitlesOf = (column: ImportColumn) => readonly string[];
-
 /** By the titles alone; of two columns with the same title the first counts. */
-export function guessColumns(titles: readonly string[], titlesOf: TitlesOf): Matching {
+export function guessColumns(titles: readonly string[], known: readonly KnownTitle[]): Matching {
   const columnOf = new Map<string, ImportColumn>();
-  for (const column of IMPORT_COLUMNS) {
-    for (const title of [...titlesOf(column), column]) {
-      const plain = plainTitle(title);
-      if (plain !== '' && !columnOf.has(plain)) columnOf.set(plain, column);
-    }
+  for (const [title, column] of known) {
+    const plain = plainTitle(title);
+    if (!columnOf.has(plain)) columnOf.set(plain, column);
   }
   const taken = new Set<ImportColumn>();
   return titles.map((title) => {
@@ -47,13 +43,4 @@ export function matchedLines({ lines }: SavedTable, matching: Matching): TableLi
 export function keptMatching(kept: unknown, titles: readonly string[]): Matching | null {
   if (!Array.isArray(kept) || kept.length !== titles.length) return null;
   return kept.map((value) => IMPORT_COLUMNS.find((column) => column === value) ?? null);
-}
-
-/** `Window_early` and `window early` are one title. */
-function plainTitle(title: string): string {
-  return title
-    .normalize('NFC')
-    .toLowerCase()
-    .replace(/[\s_-]+/gu, ' ')
-    .trim();
 }

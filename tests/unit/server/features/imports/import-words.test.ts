@@ -3,6 +3,7 @@ import { markerKeysByName, tableWordsOf, type ImportLocale } from '#server/featu
 import type { TableFacts } from '#server/features/imports/table-cells.js';
 import { tablePlan } from '#server/features/imports/table-plan.js';
 import { en } from '#shared/locales/index.js';
+import { tableTexts } from '#shared/locales/tables.js';
 import { columnWordsOf, type ColumnTexts } from '#src/features/imports/model/column-words.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
 import { readTable } from '#src/features/imports/model/read-table.js';
@@ -10,31 +11,28 @@ import { templateCsv } from '#src/features/imports/model/template.js';
 
 /** A language that nobody speaks: another folder of texts is all that a new language needs. */
 const MADE_UP: ColumnTexts = {
-  imports: {
-    column: { when: 'zeg of dag' },
-    alias: { otherSigns: 'zegnu' },
-    template: {
-      lines: {
-        one: {
-          number: '1',
-          titleOfficer: 'Zuy: sarol',
-          kind: 'fel',
-          when: 'Zuj, urm matin',
-          bestFromDays: '7',
-        },
-        two: {
-          number: '2',
-          titleOfficer: 'Zuy: wedol',
-          kind: 'fel',
-          when: 'farit dag vo 1',
-          bestFromDays: '19',
-        },
-        three: { titleOfficer: 'Zuy: klozol', kind: 'hus', bestFrom: '20 Nuvu', bestTo: 'Dezu 1' },
-        four: { titleOfficer: 'Zuy: hakol', kind: 'fel', when: 'Zuj sudo ab 21:00', bestFromDays: '0' },
+  column: { when: 'zeg of dag', titleOfficer: 'nom po buro', kind: 'sort', bestFrom: 'gut ab' },
+  alias: { otherSigns: 'zegnu' },
+  template: {
+    lines: {
+      one: {
+        number: '1',
+        titleOfficer: 'Zuy: sarol',
+        kind: 'fel',
+        when: 'Zuj, urm matin',
+        bestFromDays: '7',
       },
+      two: {
+        number: '2',
+        titleOfficer: 'Zuy: wedol',
+        kind: 'fel',
+        when: 'farit dag vo 1',
+        bestFromDays: '19',
+      },
+      three: { titleOfficer: 'Zuy: klozol', kind: 'hus', bestFrom: '20 Nuvu', bestTo: 'Dezu 1' },
+      four: { titleOfficer: 'Zuy: hakol', kind: 'fel', when: 'Zuj sudo ab 21:00', bestFromDays: '0' },
     },
   },
-  files: { calendarCsv: { column: { titleOfficer: 'nom po buro', kind: 'sort', bestFrom: 'gut ab' } } },
 };
 const WORDS: ImportLocale = {
   words: {
@@ -44,30 +42,26 @@ const WORDS: ImportLocale = {
       ...{ 'cosmical-setting': '', 'acronychal-rising': '', 'heliacal-setting': '' },
     },
     fixedDate: 'fik dag',
+    days: { day: '{{day}} vo {{month}}' },
+    offsets: { before: '{{count}} dagu ap {{sign}}' },
     figures: { pleiades: 'Zuj' },
     phrases: {
       'due-meridian': { south: '{{star}} sudo ab {{hour}}' },
       entry: { actual: 'farit dag vo {{entry}}' },
     },
-    kinds: { ...en.imports.words.kinds, farm: 'fel', household: 'hus' },
+    kinds: { ...tableTexts.en.words.kinds, farm: 'fel', household: 'hus' },
     yes: 'si',
     codes: { operations: { sow: 'sarol' } },
   },
-  codeNames: {},
-  kindNames: en.calendars.kind,
-  phenomenonNames: en.sky.phenomenon,
-  signNames: {},
 };
+
+const { calendars, record, sky } = en;
 const ENGLISH: ImportLocale = {
-  words: en.imports.words,
-  codeNames: {
-    repeats: en.record.repeats,
-    confidences: en.record.confidence,
-    bases: en.record.basis,
+  words: tableTexts.en.words,
+  names: {
+    codes: { repeats: record.repeats, confidences: record.confidence, bases: record.basis },
+    ...{ kinds: calendars.kind, phenomena: sky.phenomenon, signs: sky.sign },
   },
-  kindNames: en.calendars.kind,
-  phenomenonNames: en.sky.phenomenon,
-  signNames: en.sky.sign,
 };
 
 const words = tableWordsOf([WORDS, ENGLISH]);
@@ -84,19 +78,19 @@ const facts: TableFacts = {
 };
 const planOf = (languages: readonly ColumnTexts[], text: string) => {
   const table = readTable(text);
-  const lines = matchedLines(table, guessColumns(table.titles, columnWordsOf(languages).titlesOf));
+  const lines = matchedLines(table, guessColumns(table.titles, columnWordsOf(languages).titles));
   return tablePlan(lines, facts, []);
 };
 const templateIn = (languages: readonly ColumnTexts[]) => {
-  const { titleOf, examples } = columnWordsOf(languages);
-  return templateCsv(titleOf, examples);
+  const { titleOf } = columnWordsOf(languages);
+  return templateCsv(titleOf, Object.values(languages[0]?.template.lines ?? {}));
 };
 
 describe('a table in another language', () => {
   it('has a template of its own from its texts alone, every line of which comes in', () => {
-    const template = templateIn([MADE_UP, en]);
+    const template = templateIn([MADE_UP, tableTexts.en]);
     expect(template.split('\r\n')[0]).toMatch(/nom po buro,sort,.*zeg of dag,/u);
-    const plan = planOf([MADE_UP, en], template);
+    const plan = planOf([MADE_UP, tableTexts.en], template);
     expect(plan.map(({ problems }) => problems)).toEqual([[], [], [], []]);
     const contents = plan.map(({ entry }) => entry?.content);
     expect(contents.map((content) => [content?.kind, content?.lead.type])).toEqual([
@@ -110,7 +104,7 @@ describe('a table in another language', () => {
   });
 
   it('leaves the tables of every other language as they were', () => {
-    const plan = planOf([MADE_UP, en], templateIn([en]));
+    const plan = planOf([MADE_UP, tableTexts.en], templateIn([tableTexts.en]));
     expect(plan.map(({ problems }) => problems)).toEqual([[], [], []]);
     expect(plan.map(({ entry }) => entry?.content.lead.type)).toEqual([
       ...['marker', 'entry-actual', 'fixed-date'],

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { columnWordsOf } from '#src/features/imports/model/column-words.js';
+import { wordsOfTables } from '#src/features/imports/model/table-languages.js';
 import {
   guessColumns,
   keptMatching,
@@ -9,10 +9,9 @@ import {
 import { readTable, utf8TextOf } from '#src/features/imports/model/read-table.js';
 import { isExample, TEMPLATE_COLUMNS, templateCsv } from '#src/features/imports/model/template.js';
 import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
-import { IMPORT_COLUMNS, type ImportColumn } from '#shared/contracts/imports.js';
-import { en } from '#shared/locales/index.js';
+import { IMPORT_COLUMNS } from '#shared/contracts/imports.js';
 
-const { titlesOf } = columnWordsOf([en]);
+const { titles: known, titleOf } = wordsOfTables('en');
 
 describe('columns that a table may have', () => {
   it('are those of our own CSV that make an entry, its days, and one for words', () => {
@@ -23,7 +22,7 @@ describe('columns that a table may have', () => {
 
   it('are known by their titles in the person’s language, by other usual ones and by their ids', () => {
     const titles = ['Name for the office', 'window_early', 'bestTo', 'Anchor', 'shoe size', 'TITLE'];
-    expect(guessColumns(titles, titlesOf)).toEqual([
+    expect(guessColumns(titles, known)).toEqual([
       ...['titleOfficer', 'earliest', 'bestTo', 'when', null],
       // The same a second time counts no more.
       null,
@@ -31,8 +30,8 @@ describe('columns that a table may have', () => {
   });
 
   it('have titles that are each one column’s alone', () => {
-    const all = IMPORT_COLUMNS.map((column) => titlesOf(column)[0] ?? '');
-    expect(guessColumns(all, titlesOf)).toEqual([...IMPORT_COLUMNS]);
+    const all = IMPORT_COLUMNS.map((column) => titleOf(column));
+    expect(guessColumns(all, known)).toEqual([...IMPORT_COLUMNS]);
   });
 
   it('are chosen by hand one at a time, and kept for the same titles', () => {
@@ -68,11 +67,10 @@ describe('a table as it was saved', () => {
 
 describe('the empty table', () => {
   const examples = [{ titleOfficer: 'Example', kind: 'farm' }];
-  const titleOf = (column: ImportColumn) => titlesOf(column)[0] ?? '';
 
   it('is matched by itself, and its examples are known as long as nobody changed them', () => {
     const table = readTable(templateCsv(titleOf, examples));
-    const matching = guessColumns(table.titles, titlesOf);
+    const matching = guessColumns(table.titles, known);
     expect(matching).toEqual([...TEMPLATE_COLUMNS]);
     const [example] = matchedLines(table, matching);
     if (example === undefined) throw new Error('The template has no example.');
