@@ -2,38 +2,42 @@ import { memo } from 'react';
 import { classNames } from '../class-names.js';
 import { useWidth } from '../use-width.js';
 import { percent, startPercent, stretch, type DaySpan } from './day-span.js';
+import { fitScale, type ScaleMonth } from './fit-scale.js';
 
-/** A month of the scale. `lib/date-words` makes them: `months(year)`. */
-export interface ScaleMonth {
-  dayNumber: number;
-  days: number;
-  short: string;
-  narrow: string;
-}
+export type { ScaleMonth } from './fit-scale.js';
 
-/** Three letters and a little air, in pixels. */
-const SHORT_NAME_WIDTH = 38;
+/** A guess for the width of a letter, in pixels, where nobody measures. */
+const LETTER_PX = 9;
+const guessedWidth = (text: string) => text.length * LETTER_PX;
 
 interface MonthScaleProps {
   span: DaySpan;
   months: readonly ScaleMonth[];
   /** Of the names, where it is not the reader's. */
   lang?: string | undefined;
+  /** Of a name as it is drawn, in pixels. */
+  textWidth?: ((text: string) => number) | undefined;
 }
 
 /** Names of the months under or over a lane; one letter each where there is little room. */
-export const MonthScale = memo(function MonthScale({ span, months, lang }: MonthScaleProps) {
+export const MonthScale = memo(function MonthScale({
+  span,
+  months,
+  lang,
+  textWidth = guessedWidth,
+}: MonthScaleProps) {
   const [ref, width] = useWidth(600);
-  const narrow = width / months.length < SHORT_NAME_WIDTH;
+  const { isNarrow, parts } = fitScale(months, span, width, textWidth);
   return (
-    <div ref={ref} className={classNames('picture month-scale', narrow && 'short')} lang={lang} aria-hidden>
-      {months.map((month) => {
-        const place = stretch(month.dayNumber, month.dayNumber + month.days - 1, span);
-        if (place === null) return null;
+    <div ref={ref} className={classNames('picture month-scale', isNarrow && 'short')} lang={lang} aria-hidden>
+      {parts.map(({ dayNumber, days, text }) => {
+        const place = stretch(dayNumber, dayNumber + days - 1, span);
         return (
-          <span key={month.dayNumber} style={{ left: percent(place.start), width: percent(place.width) }}>
-            {narrow ? month.narrow : month.short}
-          </span>
+          place && (
+            <span key={dayNumber} style={{ left: percent(place.start), width: percent(place.width) }}>
+              {text}
+            </span>
+          )
         );
       })}
     </div>

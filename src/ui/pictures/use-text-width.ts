@@ -1,12 +1,11 @@
-import { useCallback, useEffect, useRef, useState } from 'react';
+import { useCallback, useEffect, useState } from 'react';
 
 /** A guess for the width of one letter, as a share of the size of the type, where nothing can be measured. */
 const LETTER_SHARE = 0.56;
 
 /** Width of a text in the board's type, in pixels. Measures again when the type has arrived. */
 export function useTextWidth(sizePx: number): (text: string) => number {
-  const [, setTypeIsHere] = useState(false);
-  const measured = useRef<CanvasRenderingContext2D | null>(null);
+  const [measured, setMeasured] = useState<CanvasRenderingContext2D | null>(null);
   useEffect(() => {
     if (typeof CanvasRenderingContext2D === 'undefined') return undefined;
     let gone = false;
@@ -14,8 +13,7 @@ export function useTextWidth(sizePx: number): (text: string) => number {
       const context = document.createElement('canvas').getContext('2d');
       if (gone || context === null) return;
       context.font = `${String(sizePx)}px ${getComputedStyle(document.body).fontFamily}`;
-      measured.current = context;
-      setTypeIsHere(true);
+      setMeasured(context);
     };
     void document.fonts.ready.then(ready);
     return () => {
@@ -23,7 +21,7 @@ export function useTextWidth(sizePx: number): (text: string) => number {
     };
   }, [sizePx]);
   return useCallback(
-    (text: string) => measured.current?.measureText(text).width ?? text.length * sizePx * LETTER_SHARE,
-    [sizePx],
+    (text: string) => measured?.measureText(text).width ?? text.length * sizePx * LETTER_SHARE,
+    [sizePx, measured],
   );
 }

@@ -63,6 +63,8 @@ const BAR_HEIGHT = 12;
 const BAR_PITCH = 38;
 const BARS_GAP = 8;
 const LABEL_SIZE = 16;
+/** Nearer to each other, only lines with a name beside them are drawn. */
+const LINES_APART = 12;
 /** A longer name is cut; the list says it whole. */
 const LABEL_SHARE_MAX = 0.3;
 const LABEL_LEAST = 96;
@@ -99,18 +101,27 @@ export function YearBoard(props: YearBoardProps) {
       }),
     [placed, byKey, barsTop],
   );
+  const lines = useMemo(
+    () => months.filter(({ days, narrow }) => days * pxPerDay >= LINES_APART || narrow !== ''),
+    [months, pxPerDay],
+  );
   const pairedLane = lanes.findIndex(({ key }) => key === pairing?.laneKey);
 
   return (
     <div className="year-board">
       <div />
-      <MonthScale span={span} months={months} />
+      <MonthScale span={span} months={months} textWidth={textWidth} />
       {props.secondScale && (
         <>
           <div className="year-board-name text-small text-umber-soft" aria-hidden>
             <span title={props.secondScale.name}>{props.secondScale.name}</span>
           </div>
-          <MonthScale span={span} months={props.secondScale.parts} lang={props.secondScale.lang} />
+          <MonthScale
+            span={span}
+            months={props.secondScale.parts}
+            lang={props.secondScale.lang}
+            textWidth={textWidth}
+          />
         </>
       )}
       <div className="year-board-names" aria-hidden style={{ paddingTop: lanesTop }}>
@@ -125,7 +136,7 @@ export function YearBoard(props: YearBoardProps) {
         </div>
       </div>
       <div className="picture" ref={ref} style={{ height }}>
-        <MonthLines span={span} months={months} />
+        <MonthLines span={span} months={lines} />
         {lanes.map((lane, index) => (
           <div key={lane.key} className="year-board-lane" style={{ top: lanesTop + index * LANE_PITCH }}>
             {lane.marks ? (

@@ -42,7 +42,7 @@ export function WideView(parts: ViewParts) {
   return (
     <Page>
       <Mast title={t('editor.title', { year: editor.calendar.year })} under={<DraftState editor={editor} />}>
-        <div className="flex flex-wrap items-start justify-end gap-3">
+        <div className="flex flex-wrap items-start gap-3">
           <ToolLinks {...parts} />
           {editor.canWriteSelected && (
             <div>

@@ -49,8 +49,8 @@ export function runsFrom(starts: readonly Start[], span: DaySpan): ScalePart[] {
 /** The village's own months; the first one may have begun before the span. */
 export function villageMonths(span: DaySpan, months: readonly LocalMonth[]): ScalePart[] {
   const [from, to] = [dateOfDayNumber(span.first).year, dateOfDayNumber(span.last).year];
-  const starts = localMonthStarts(months, from - 1, to).map(({ dayNumber, name }) => ({
-    ...{ dayNumber, short: name, narrow: firstLetter(name), long: '', ownName: name },
+  const starts = localMonthStarts(months, from - 1, to + 1).map(({ dayNumber, name }) => ({
+    ...{ dayNumber, short: name, narrow: firstLetter(name), mayCut: true, long: '', ownName: name },
   }));
   return runsFrom(starts, span);
 }
@@ -65,12 +65,18 @@ function firstLetter(name: string): string {
 export function daysOf(span: DaySpan, name: (dayNumber: number) => string): ScalePart[] {
   return Array.from({ length: span.last - span.first + 1 }, (_, index) => {
     const dayNumber = span.first + index;
-    const short = String(dateOfDayNumber(dayNumber).day);
-    return { dayNumber, days: 1, short, narrow: short, long: name(dayNumber) };
+    const { day } = dateOfDayNumber(dayNumber);
+    const short = String(day);
+    // Every fifth where there is little room; the 30th would touch the first.
+    const isSparse = day === 1 || (day % 5 === 0 && day < 30);
+    return { dayNumber, days: 1, short, narrow: isSparse ? short : '', long: name(dayNumber) };
   });
 }
 
-/** Months of a civil calendar that the browser knows, by its CLDR name; the first and the last are cut by the span. */
+/** No month of a calendar is longer. */
+const MONTH_DAYS_MAX = 31;
+
+/** Months of a civil calendar that the browser knows, by its CLDR name; whole, where they reach over the span. */
 export function civilMonths(span: DaySpan, calendar: string, locale: string): ScalePart[] {
   const format = (month: 'short' | 'narrow' | 'long') =>
     new Intl.DateTimeFormat(locale, { calendar, month, year: 'numeric', timeZone: 'UTC' });
@@ -79,7 +85,8 @@ export function civilMonths(span: DaySpan, calendar: string, locale: string): Sc
     parts.find(({ type }) => type === 'month')?.value ?? '';
   const starts: Start[] = [];
   let before = '';
-  for (let dayNumber = span.first; dayNumber <= span.last; dayNumber += 1) {
+  const until = span.last + MONTH_DAYS_MAX;
+  for (let dayNumber = span.first - MONTH_DAYS_MAX; dayNumber <= until; dayNumber += 1) {
     const date = utcDate(dateOfDayNumber(dayNumber));
     const whole = long.format(date);
     if (whole === before) continue;

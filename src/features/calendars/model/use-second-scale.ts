@@ -56,6 +56,7 @@ export function useSecondScale(
           name: t('scale.market'),
           parts: marketWeeks(span, marketDays, dayNumberFromIso(marketDay), (day) => ({
             short: dates.day(day, 'short'),
+            // Lines alone: a number for every week would leave no room between them.
             narrow: '',
             long: t('marketWeek', { day: dates.day(day) }),
           })),
@@ -95,7 +96,7 @@ function useMoonParts(placeId: string, community: Community | null, span: DaySpa
         short: ownName === '' ? t('moonShort', { nth }) : ownName,
         narrow: String(nth),
         long: t('moonLong', { nth, day: dates.day(yearStartDay, 'year') }),
-        ...(ownName === '' ? {} : { ownName }),
+        ...(ownName === '' ? {} : { ownName, mayCut: true }),
       };
     });
     return runsFrom(named, span);

@@ -50,7 +50,7 @@ describe('months of a village', () => {
     expect(runs(span)).toEqual([
       ['2026-12-28', 162, 'ɓèŋu̍'],
       ['2027-06-08', 203, 'Ŋɔ́rɛ̃'],
-      ['2027-12-28', 4, 'ɓèŋu̍'],
+      ['2027-12-28', 163, 'ɓèŋu̍'],
     ]);
   });
 
@@ -80,16 +80,18 @@ describe('months of another calendar', () => {
   });
 
   it.each(['islamic-umalqura', 'ethiopic', 'hebrew', 'chinese', 'persian', 'indian', 'buddhist'])(
-    '%s fills the year without a gap',
+    '%s fills the year without a gap, with whole months at its ends',
     (calendar) => {
       const months = civilMonths(span, calendar, 'en-GB');
-      expect(months[0]?.dayNumber).toBe(span.first);
+      expect(months[0]?.dayNumber).toBeLessThanOrEqual(span.first);
+      expect(months[0]?.days).toBeGreaterThanOrEqual(29);
       months.slice(1).forEach((month, index) => {
         const before = months[index];
         expect(month.dayNumber).toBe((before?.dayNumber ?? 0) + (before?.days ?? 0));
       });
       const last = months.at(-1);
-      expect((last?.dayNumber ?? 0) + (last?.days ?? 0)).toBe(span.last + 1);
+      expect(last?.dayNumber).toBeLessThanOrEqual(span.last);
+      expect((last?.dayNumber ?? 0) + (last?.days ?? 0)).toBeGreaterThan(span.last);
       expect(months.length).toBeGreaterThanOrEqual(12);
     },
   );
