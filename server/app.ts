@@ -307,7 +307,7 @@ export function createApp(options: AppOptions): App {
   sheetsRoutes(mount, new SheetsService(contents, versions, weather, clock), readBack);
   const feeds = new FeedsService(dataSource, clock, contents);
   const media = new ListedMediaService(dataSource, clock, options.storage);
-  exportsRoutes(router, mount, new ExportsService(contents, clock, media), feeds);
+  exportsRoutes(router, mount, new ExportsService(contents, clock, media, dataSource), feeds);
   importsRoutes(mount, {
     files: new FileImportService(dataSource, clock, options.withdrawals),
     tables: new TableImportService(dataSource, clock, sky),

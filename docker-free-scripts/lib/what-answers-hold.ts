@@ -163,7 +163,11 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   exportCalendarIcs: BOARD,
   // Whole: other timings stand beside their entries, as far as the board may go by them.
   exportCalendarCsv: { ...BOARD, variant: both(sees, onBoard) },
-  exportCalendarJson: { ...BOARD, variant: both(sees, onBoard), ...LISTED_FILES },
+  exportCalendarJson: {
+    ...{ ...BOARD, variant: both(sees, onBoard), ...LISTED_FILES },
+    // What the year taught, beside entries that are in the file, for those who read drafts.
+    ...{ lesson: both(keptSeen, onBoard), decision: both(keptSeen, onBoard) },
+  },
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.

@@ -11,6 +11,9 @@ export const fileImport = z.strictObject({
   refused: z.number().int(),
   /** Voices and pictures that the file lists; they stay with the entries to which they were given. */
   mediaLeft: z.number().int(),
+  /** Lessons and decisions of the year that come along, and those that do not: taken out since, of another year, said already. */
+  seasonAdded: z.number().int(),
+  seasonLeft: z.number().int(),
   /** Where the file comes from. */
   from: z.strictObject({ year: z.number().int(), placeName: z.string(), label: z.string().nullable() }),
 });

@@ -4,6 +4,7 @@ import type { CalendarFile } from '#shared/contracts/calendar-file.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import type { Lesson, SeasonReview } from '#shared/contracts/season-reviews.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
@@ -115,8 +116,11 @@ describe('a file that comes back', () => {
     expect((await exported(fromId)).media).toEqual([]);
   });
 
-  it('comes in from the form before there was such a list', async () => {
-    const { media: _none, checksums, ...older } = await exported(fromId);
+  it('comes in from the forms before there was such a list, and before the year’s lessons went along', async () => {
+    const { season: _said, checksums: all, ...second } = await exported(fromId);
+    const { season: _seal, ...checksums } = all;
+    expect(await bringIn({ ...second, schemaVersion: 2, checksums })).toMatchObject({ added: 1 });
+    const { media: _none, ...older } = second;
     const { media: _sum, ...sums } = checksums;
     expect(await bringIn({ ...older, schemaVersion: 1, checksums: sums })).toMatchObject({ added: 1 });
     const touched = { ...older, schemaVersion: 1, checksums: { ...sums, entries: '0'.repeat(64) } };
@@ -151,10 +155,98 @@ describe('a file that comes back', () => {
 
   it('is tried first without a trace', async () => {
     expect(await bringIn(await exported(fromId), { dryRun: true })).toEqual({
-      ...{ added: 1, refused: 0, mediaLeft: 0 },
+      ...{ added: 1, refused: 0, mediaLeft: 0, seasonAdded: 0, seasonLeft: 0 },
       from: { year: 2027, placeName: 'Upper terraces', label: null },
     });
     expect(await draftOf()).toEqual([]);
+  });
+});
+
+describe('what the year taught', () => {
+  const review = (calendarId: string) => `/api/calendars/${calendarId}/season-review`;
+  const lookedBack = async (client: Client, calendarId: string) =>
+    (await client.get(review(calendarId)).expect(200)).body as SeasonReview;
+  const told = ({ entries, lessons, decisions }: SeasonReview) =>
+    [{ titleOfficer: '', lessons, decisions }, ...entries].map((about) => ({
+      about: about.titleOfficer,
+      lessons: about.lessons.map(({ id: _id, ...rest }) => rest),
+      decisions: about.decisions.map(({ id: _id, ...rest }) => rest),
+    }));
+  const lookBack = async () => {
+    const { elder, officer, steward } = village;
+    const say = (client: Client, entryId: string | null, text: string) =>
+      client.post(`${review(fromId)}/lessons`, { entryId, text }).expect(201);
+    const lesson = (await say(elder, sow.id, 'The rain came late')).body as Lesson;
+    await say(steward, null, 'A "dry" year;\n=and more');
+    const decision = { entryId: sow.id, kind: 'later', text: '' };
+    await officer.post(`${review(fromId)}/decisions`, decision).expect(201);
+    await officer
+      .post(`${review(fromId)}/decisions`, { entryId: null, kind: 'own-words', text: 'Meet earlier' })
+      .expect(201);
+    return lesson;
+  };
+
+  it('comes back beside its entries, word for word, in the names of those who said it', async () => {
+    await lookBack();
+    const before = await exported(fromId);
+    expect([before.season.lessons.length, before.season.decisions.length]).toEqual([2, 2]);
+    expect(JSON.stringify(before.season)).not.toMatch(/Elder A|Officer A|authorId/u);
+    expect(await bringIn(before, { dryRun: true })).toMatchObject({ seasonAdded: 4, seasonLeft: 0 });
+    expect((await lookedBack(village.officer, intoId)).lessons).toEqual([]);
+    const key = randomUUID();
+    const first = await bringIn(before, { key });
+    expect(first).toMatchObject({ added: 1, seasonAdded: 4, seasonLeft: 0 });
+    expect(await bringIn(before, { key })).toEqual(first);
+    for (const client of [village.officer, village.elder]) {
+      expect(told(await lookedBack(client, intoId))).toEqual(told(await lookedBack(client, fromId)));
+    }
+    // The clock stands still: what was said at one moment has no order.
+    const byText = (a: { text: string }, b: { text: string }) => a.text.localeCompare(b.text);
+    const withoutIds = ({ season: { lessons, decisions } }: CalendarFile) => [
+      lessons.toSorted(byText).map(({ lessonId: _id, entryId, ...rest }) => [entryId === null, rest]),
+      decisions.toSorted(byText).map(({ decisionId: _id, entryId, ...rest }) => [entryId === null, rest]),
+    ];
+    expect(withoutIds(await exported(intoId))).toEqual(withoutIds(before));
+    // Of the year it is said already; the entry comes a second time, and what was said of it too.
+    expect(await bringIn(before)).toMatchObject({ seasonAdded: 2, seasonLeft: 2 });
+  });
+
+  it('goes into no other year, and leaves out what its writer took out or what went with its entry', async () => {
+    const { elder, officer } = village;
+    const lesson = await lookBack();
+    const other = await addEntry(officer, fromId, { titleOfficer: 'Mend', giverId: elder.personId });
+    const about = { entryId: other.id, text: 'Walls fell' };
+    await elder.post(`${review(fromId)}/lessons`, about).expect(201);
+    const file = await exported(fromId);
+    const next = (await beginCalendar(village, 2028)).id;
+    expect(await bringIn(file, { into: next })).toMatchObject({ added: 2, seasonAdded: 0, seasonLeft: 5 });
+    await elder.delete(`${review(fromId)}/lessons/${lesson.id}`).expect(204);
+    const item = `/api/communities/${elder.communityId}/items/entry/${other.id}`;
+    await elder.post(`${item}/withdrawal`, { leavesTrace: false, askedById: null }).expect(204);
+    expect(await bringIn(file)).toMatchObject({ added: 1, refused: 1, seasonAdded: 3, seasonLeft: 2 });
+    expect(JSON.stringify(await lookedBack(elder, intoId))).not.toMatch(/rain came late|Walls fell/u);
+  });
+
+  it('takes nobody’s word from the file: made-up words come in nowhere, and a changed part is refused', async () => {
+    await lookBack();
+    const file = await exported(fromId);
+    const { season } = file;
+    const written = season.lessons.map((each) => ({ ...each, text: 'Never said' }));
+    const foreign = [...written, { ...written[0], lessonId: randomUUID() } as never];
+    const changed = { ...file, season: { ...season, lessons: foreign } };
+    expect(reasonOf(await send(village.officer, changed))).toBe('409 file-changed');
+    expect(await bringIn(sealed(changed))).toMatchObject({ seasonAdded: 4, seasonLeft: 1 });
+    expect(JSON.stringify(await lookedBack(village.elder, intoId))).not.toContain('Never said');
+  });
+
+  it('is in no file of those who read no drafts', async () => {
+    await lookBack();
+    const { number } = await publishDraft(village, fromId);
+    const staff = await api.signIn('staff');
+    const path = `/api/calendars/${fromId}/versions/${String(number)}/calendar.json`;
+    const { season } = (await staff.get(path).expect(200)).body as CalendarFile;
+    expect(season).toEqual({ lessons: [], decisions: [] });
+    expect((await exported(fromId, String(number))).season.lessons).toHaveLength(2);
   });
 });
 
@@ -202,9 +294,9 @@ describe('what was taken back or is kept since', () => {
 describe('a file that does not fit', () => {
   it('is told by its form, its checksum, its village or its kind; nothing comes in', async () => {
     const file = await exported(fromId);
-    const newer = await send(village.officer, { ...file, schemaVersion: 3 });
+    const newer = await send(village.officer, { ...file, schemaVersion: 4 });
     expect(reasonOf(newer)).toBe('409 other-file-version');
-    expect((newer.body as Problem).names).toEqual(['3']);
+    expect((newer.body as Problem).names).toEqual(['4']);
     const [first] = file.entries;
     const touched = { ...file, entries: [{ ...first, entryId: randomUUID() }] };
     expect(reasonOf(await send(village.officer, touched))).toBe('409 file-changed');
@@ -236,8 +328,11 @@ describe('a file that does not fit', () => {
 /** With checksums that fit, as somebody would make them who writes a file of their own. */
 function sealed(file: CalendarFile): CalendarFile {
   const sum = (part: unknown) => createHash('sha256').update(canonicalJson(part)).digest('hex');
-  const { source, header, entries, media } = file;
-  const checksums = { source: sum(source), header: sum(header), entries: sum(entries), media: sum(media) };
+  const { source, header, entries, media, season } = file;
+  const checksums = {
+    ...{ source: sum(source), header: sum(header), entries: sum(entries) },
+    ...{ media: sum(media), season: sum(season) },
+  };
   return { ...file, checksums };
 }
 

@@ -1,11 +1,12 @@
 import {
-  CALENDAR_FILE_FIRST_SCHEMA,
   CALENDAR_FILE_FORMAT,
   CALENDAR_FILE_SCHEMA,
+  CALENDAR_FILE_PART_SINCE,
   CALENDAR_FILE_PARTS,
   type CalendarFile,
   type CalendarFileMedium,
   type CalendarFilePart,
+  type CalendarFileSeason,
 } from '#shared/contracts/calendar-file.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
@@ -18,7 +19,7 @@ export function calendarFileOf(
   content: CalendarContent,
   calendarId: string,
   exportedAt: Date,
-  media: CalendarFileMedium[],
+  { media, season }: { media: CalendarFileMedium[]; season: CalendarFileSeason },
 ): CalendarFile {
   const { number, label, state, hash: versionHash, entries } = content;
   const { salt: _hidden, ...header } = content.header;
@@ -31,7 +32,7 @@ export function calendarFileOf(
     },
     header,
     entries,
-    media,
+    ...{ media, season },
   };
   return {
     format: CALENDAR_FILE_FORMAT,
@@ -42,6 +43,7 @@ export function calendarFileOf(
       header: checksumOf(parts.header),
       entries: checksumOf(parts.entries),
       media: checksumOf(parts.media),
+      season: checksumOf(parts.season),
     },
   };
 }
@@ -52,8 +54,8 @@ export function brokenParts(file: Readonly<Record<string, unknown>>): CalendarFi
   const given = new Map<string, unknown>(
     typeof checksums === 'object' && checksums !== null ? Object.entries(checksums) : [],
   );
-  const isFirst = file['schemaVersion'] === CALENDAR_FILE_FIRST_SCHEMA;
-  return CALENDAR_FILE_PARTS.filter((part) => part !== 'media' || !isFirst).filter(
+  const form = Number(file['schemaVersion']);
+  return CALENDAR_FILE_PARTS.filter((part) => CALENDAR_FILE_PART_SINCE[part] <= form).filter(
     (part) => file[part] === undefined || checksumOf(file[part]) !== given.get(part),
   );
 }

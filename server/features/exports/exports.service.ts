@@ -1,10 +1,12 @@
 import type { CsvQuery, IcsQuery } from '#shared/contracts/exports.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
+import type { DataSource } from 'typeorm';
 import { seesDrafts, type Actor } from '../../http/actor.js';
 import type { Clock } from '../../http/context.js';
 import { fileNameOf } from '../../print/file-name.js';
 import { translatorFor } from '../../print/translator.js';
 import type { ListedMediaService } from '../attachments/listed-media.service.js';
+import { seasonToCarry } from '../season-reviews/carried-season.service.js';
 import type { CalendarContent, FrozenContentService } from '../versions/frozen-content.service.js';
 import { calendarCsv } from './calendar-csv.js';
 import { calendarFileOf } from './calendar-file.service.js';
@@ -21,6 +23,7 @@ export class ExportsService {
     private readonly contents: FrozenContentService,
     private readonly clock: Clock,
     private readonly media: ListedMediaService,
+    private readonly dataSource: DataSource,
   ) {}
 
   async ics(actor: Actor, calendarId: string, number: string, query: IcsQuery): Promise<ExportedFile> {
@@ -39,7 +42,11 @@ export class ExportsService {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
     const ids = content.entries.map(({ entryId }) => entryId);
     const media = await this.media.of(actor.communityId, ids);
-    const file = calendarFileOf(content, calendarId, this.clock.now(), media);
+    // What a year taught is for those who read drafts.
+    const season = seesDrafts(actor)
+      ? await seasonToCarry(this.dataSource.manager, calendarId, ids)
+      : { lessons: [], decisions: [] };
+    const file = calendarFileOf(content, calendarId, this.clock.now(), { media, season });
     return { content: JSON.stringify(file, null, 1), fileName: nameOf(content, 'json') };
   }
 }

@@ -1,9 +1,7 @@
 import {
-  CALENDAR_FILE_FIRST_SCHEMA,
   CALENDAR_FILE_SCHEMA,
-  calendarFile,
-  calendarFileFirst,
   calendarFileKind,
+  readableCalendarFile,
   type ReadableCalendarFile,
 } from '#shared/contracts/calendar-file.js';
 import { conflict, invalidField } from '../../http/app-error.js';
@@ -19,11 +17,11 @@ export function readCalendarFile(text: string): ReadableCalendarFile {
   const kind = calendarFileKind.safeParse(raw);
   if (!kind.success) throw invalidField('file', 'not-a-calendar-file');
   const { schemaVersion } = kind.data;
-  if (schemaVersion !== CALENDAR_FILE_SCHEMA && schemaVersion !== CALENDAR_FILE_FIRST_SCHEMA) {
+  if (schemaVersion < 1 || schemaVersion > CALENDAR_FILE_SCHEMA) {
     throw conflict('other-file-version', [String(schemaVersion)]);
   }
   if (isBroken(kind.data)) throw conflict('file-changed');
-  const file = (schemaVersion === CALENDAR_FILE_SCHEMA ? calendarFile : calendarFileFirst).safeParse(raw);
+  const file = readableCalendarFile.safeParse(raw);
   if (!file.success) throw invalidField('file', 'not-a-calendar-file');
   return file.data;
 }

@@ -1,4 +1,4 @@
-import type { ReadableCalendarFile } from '#shared/contracts/calendar-file.js';
+import type { CalendarFileSeason, ReadableCalendarFile } from '#shared/contracts/calendar-file.js';
 import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
@@ -23,10 +23,11 @@ import type { WithdrawalList } from '../../storage/withdrawal-list.js';
 import type { IncomingFile } from '../attachments/attachment-files.service.js';
 import { knowsMarker, markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
+import { seasonToLand, type SeasonPlan } from '../season-reviews/carried-season.service.js';
 import { readCalendarFile } from './calendar-file-reader.js';
 import { filePlan, type FilePlan, type KnownToday } from './file-plan.js';
 import { withSignsOfToday } from './village-signs.service.js';
-import { landOnce } from './landing.service.js';
+import { landOnce, seasonCounts } from './landing.service.js';
 
 /** A calendar's own file, back in a draft of its village. */
 export class FileImportService {
@@ -56,17 +57,17 @@ export class FileImportService {
       const { manager } = this.dataSource;
       const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
       if (calendar.outNumber !== null) throw new AppError('draft-locked');
-      const { entries, refused } = await this.plan(manager, actor, calendar.year, file, listed);
-      return { added: entries.length, refused, from, mediaLeft };
+      const { entries, refused, season } = await this.plan(manager, actor, calendar, file, listed);
+      return { added: entries.length, refused, ...seasonCounts(season), from, mediaLeft };
     }
     const at = this.clock.now();
-    const { added, refused } = await inTransaction(this.dataSource, (manager) =>
-      landOnce(manager, actor, calendarId, at, async ({ year }) => ({
-        ...(await this.plan(manager, actor, year, file, listed)),
+    const { isNew: _again, ...counts } = await inTransaction(this.dataSource, (manager) =>
+      landOnce(manager, actor, calendarId, at, async (calendar) => ({
+        ...(await this.plan(manager, actor, calendar, file, listed)),
         way: 'file',
       })),
     );
-    return { added, refused, from, mediaLeft };
+    return { ...counts, from, mediaLeft };
   }
 
   private async expectOfVillage(
@@ -82,13 +83,19 @@ export class FileImportService {
   private async plan(
     manager: EntityManager,
     actor: Actor,
-    year: number,
+    calendar: CalendarEntity,
     file: ReadableCalendarFile,
     listed: ReadonlySet<string>,
-  ): Promise<FilePlan> {
-    const plan = filePlan(file, await this.today(manager, actor, year, file, listed));
+  ): Promise<FilePlan & { season: SeasonPlan }> {
+    const plan = filePlan(file, await this.today(manager, actor, calendar.year, file, listed));
     const viewer = await viewerOf(manager, actor, this.clock.now());
-    return { ...plan, entries: await withSignsOfToday(manager, viewer, plan.entries) };
+    const entries = await withSignsOfToday(manager, viewer, plan.entries);
+    const newIdOf = new Map(entries.flatMap(({ id, sameAs }) => (sameAs === null ? [] : [[sameAs, id]])));
+    const carried = 'season' in file ? file.season : NO_SEASON;
+    // Beside nothing that comes in, nothing is told of the year either.
+    const said =
+      entries.length === 0 ? leftWhole(carried) : await seasonToLand(manager, calendar, carried, newIdOf);
+    return { ...plan, entries, season: said };
   }
 
   private async today(
@@ -143,6 +150,12 @@ export class FileImportService {
       },
     };
   }
+}
+
+const NO_SEASON: CalendarFileSeason = { lessons: [], decisions: [] };
+
+function leftWhole({ lessons, decisions }: CalendarFileSeason): SeasonPlan {
+  return { lessons: [], decisions: [], left: lessons.length + decisions.length };
 }
 
 async function byId<T extends { id: string }>(rows: Promise<T[]>): Promise<Map<string, T>> {

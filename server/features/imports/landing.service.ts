@@ -19,6 +19,7 @@ import { roomAtTheEnd } from '../calendars/draft-order.service.js';
 import { withOwnSignIds, withSignsOfThisVillage } from '../signs/entry-signs.service.js';
 import { lockCalendar, recordContribution } from '../calendars/draft.service.js';
 import { sharingOf } from '../calendars/entry-sharing.service.js';
+import { landSeason, type SeasonPlan } from '../season-reviews/carried-season.service.js';
 
 /** The way by which something came into a draft. */
 export type ImportWay = 'file' | 'table' | 'village';
@@ -38,12 +39,16 @@ export interface Landed {
   isNew: boolean;
   added: number;
   refused: number;
+  seasonAdded: number;
+  seasonLeft: number;
 }
 
 export interface Landing {
   way: ImportWay;
   entries: readonly LandingEntry[];
   refused: number;
+  /** What the year taught, where entries come in beside which it stands. */
+  season?: SeasonPlan;
 }
 
 /**
@@ -62,13 +67,22 @@ export async function landOnce(
     if (calendar.outNumber !== null) throw new AppError('draft-locked');
     const landing = await prepare(calendar);
     await land(manager, actor, calendar, landing, at);
+    const { entries, refused, season } = landing;
+    if (season) await landSeason(manager, season);
     return {
       resultId: calendarId,
-      counts: { added: landing.entries.length, refused: landing.refused },
+      counts: { added: entries.length, refused, ...seasonCounts(season) },
     };
   });
   if (resultId !== calendarId) throw conflict('write-key-used');
-  return { isNew, ...counts };
+  // What was written before there were such counts has none.
+  return { isNew, ...seasonCounts(undefined), ...counts };
+}
+
+export function seasonCounts(season: SeasonPlan | undefined): Pick<Landed, 'seasonAdded' | 'seasonLeft'> {
+  if (season === undefined) return { seasonAdded: 0, seasonLeft: 0 };
+  const { lessons, decisions, left } = season;
+  return { seasonAdded: lessons.length + decisions.length, seasonLeft: left };
 }
 
 async function land(

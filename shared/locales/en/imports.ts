@@ -81,6 +81,12 @@ export const texts = {
     media_one: 'It lists {{count}} voice or picture, which stays with the entry to which it was given.',
     media_other:
       'It lists {{count}} voices and pictures, which stay with the entries to which they were given.',
+    season_one: '{{count}} lesson or decision of the year comes along.',
+    season_other: '{{count}} lessons and decisions of the year come along.',
+    seasonLeft_one:
+      '{{count}} lesson or decision does not: it was taken out since, is of another year than this calendar, or stands here already.',
+    seasonLeft_other:
+      '{{count}} lessons and decisions do not: they were taken out since, are of another year than this calendar, or stand here already.',
     levels: 'Each keeps who may see it and what was agreed about it, as they are today.',
   },
   copy: {

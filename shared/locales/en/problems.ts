@@ -308,7 +308,7 @@ export const texts = {
   /** Reasons that are said with what stands in the way. */
   named: {
     'other-file-version':
-      'This file is of form {{names}}, and this Dawnpeg reads form 1. Export it anew, or bring Dawnpeg up to date.',
+      'This file is of form {{names}}, which this Dawnpeg does not read. Export it anew, or bring Dawnpeg up to date.',
     'entries-hang-on-it':
       'These entries count their days from this one: {{names}}. Let them go by something else first.',
     'record-incomplete':

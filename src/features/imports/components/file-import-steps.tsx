@@ -39,6 +39,10 @@ export function FileImportSteps({ calendar, sent, onDone }: FileImportStepsProps
           </p>
           <p className="mt-1">{t('file.adds', { count: found.added })}</p>
           {found.refused > 0 && <p className="mt-1">{t('file.refused', { count: found.refused })}</p>}
+          {found.seasonAdded > 0 && <p className="mt-1">{t('file.season', { count: found.seasonAdded })}</p>}
+          {found.seasonLeft > 0 && (
+            <p className="mt-1">{t('file.seasonLeft', { count: found.seasonLeft })}</p>
+          )}
           {found.mediaLeft > 0 && <p className="mt-1">{t('file.media', { count: found.mediaLeft })}</p>}
           <p className="mt-1 text-small">{t('file.levels')}</p>
         </div>
