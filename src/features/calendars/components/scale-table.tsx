@@ -28,7 +28,7 @@ export function ScaleTable({ name, parts, lang }: SecondScale) {
                 )}
                 {long}
               </th>
-              <td>{dates.day(dayNumber, 'year')}</td>
+              <td>{dates.day(dayNumber, 'short-year')}</td>
             </tr>
           ))}
         </tbody>

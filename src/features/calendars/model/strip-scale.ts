@@ -57,8 +57,7 @@ export function villageMonths(span: DaySpan, months: readonly LocalMonth[]): Sca
 
 /** With all marks that belong to it. */
 function firstLetter(name: string): string {
-  const [first] = new Intl.Segmenter().segment(name);
-  return first?.segment ?? '';
+  return /^.\p{M}*/u.exec(name)?.[0] ?? '';
 }
 
 /** Every day of a span, for the closest look. */
