@@ -57,13 +57,23 @@ export interface NeedsOfRecord {
 /** Seed that is in the ground cannot be taken back: signs decide, not a day alone. */
 const INTO_THE_GROUND: readonly (string | null)[] = ['sow', 'plant', 'gap-fill'];
 
+const NOTHING_SAID: NeedsOfRecord = {
+  what: { operation: null, land: '' },
+  when: { leadDays: null, graceDays: null },
+  signs: { needed: null, mustHave: null },
+  work: { responsible: '', decides: '', ifEarly: '', stop: null, askWhom: '' },
+  trust: { confidence: null, by: '', basis: null },
+  heard: { where: '', day: null, language: '' },
+  checked: { work: null, safety: null, late: null },
+};
+
 /**
- * What is still to be said, in the order of the form. Empty where nothing is missing, and for entries without a record: they
- * were written before there was one, and go on as they did.
+ * What is still to be said, in the order of the form; empty where nothing is missing. An entry of the time before there
+ * were records goes on without one as it did, until something of it is said.
  */
-export function signOffNeeds(entry: NeedsOfEntry): SignOffNeed[] {
-  const { record } = entry;
-  if (record === undefined) return [];
+export function signOffNeeds(entry: NeedsOfEntry, isOlder = false): SignOffNeed[] {
+  if (entry.record === undefined && isOlder) return [];
+  const record = entry.record ?? NOTHING_SAID;
   const missing = new Set<SignOffNeed>(missingOfWhose(entry, record));
   if (entry.kind !== 'marker-only') {
     for (const need of missingOfWork(entry, record)) missing.add(need);

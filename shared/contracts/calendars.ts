@@ -233,6 +233,8 @@ export const entry = z.strictObject({
   updatedAt: instant,
   /** The asking person's own, to write on: of a kept thing its giver's, else the officers'. */
   mine: z.boolean(),
+  /** Of the time before there were records: it goes to the elders without one. Left out of every other. */
+  isOlder: z.literal(true).optional(),
   /** When it was really done, where that is known. */
   actual: actualDays.optional(),
   /** What else to look at; left out where there is nothing. */

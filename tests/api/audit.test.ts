@@ -18,6 +18,7 @@ import {
   takeBack,
   versionPath,
   type Village,
+  wholeEntry,
 } from '#tests/support/calendar-api.js';
 
 let api: TestApi;
@@ -47,7 +48,7 @@ describe('the audit', () => {
     const { id } = await beginCalendar(village);
     const entries = `/api/calendars/${id}/entries`;
     const sowing = await addEntry(officer, id);
-    const content = entryInput({ notes: 'Upper terraces first', crop: 'millet' });
+    const content = wholeEntry({ notes: 'Upper terraces first', crop: 'millet' });
     await officer.put(`${entries}/${sowing.id}`, { content, version: 1 }).expect(200);
     const copy = (await officer.post(`${entries}/${sowing.id}/copy`).expect(201)).body as Entry;
     await officer.put(`/api/calendars/${id}/order`, { entryIds: [copy.id, sowing.id] }).expect(200);
@@ -113,7 +114,7 @@ describe('the audit', () => {
     const { id } = await beginCalendar(village);
     const words = { titleOfficer: 'Xyzzy sowing', titleVillage: 'Ŋɔ́rɛ̃', notes: 'plugh', giver: 'Old Veshta' };
     const entry = await addEntry(officer, id, words);
-    const content = entryInput({ ...words, notes: 'plover' });
+    const content = wholeEntry({ ...words, notes: 'plover' });
     await officer.put(`/api/calendars/${id}/entries/${entry.id}`, { content, version: 1 }).expect(200);
     const version = await submit(officer, id);
     const answer = `${versionPath(version)}/entries/${entry.id}/answer`;
@@ -135,7 +136,7 @@ describe('the audit', () => {
     await addEntry(officer, id);
     await changePlace(api, village.placeId, { name: 'Lower terraces' });
     const [entry] = await entriesOf(officer, id);
-    const content = entryInput({ titleOfficer: 'Sow early millet' });
+    const content = wholeEntry({ titleOfficer: 'Sow early millet' });
     await officer.put(`/api/calendars/${id}/entries/${entry?.id ?? ''}`, { content, version: 1 }).expect(200);
     expect(lines(await page())).toEqual([
       'Beyno: entry-changed Sow early millet',

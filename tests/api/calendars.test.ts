@@ -18,6 +18,7 @@ import {
   submit,
   takeBack,
   type Village,
+  wholeEntry,
 } from '#tests/support/calendar-api.js';
 
 let api: TestApi;
@@ -246,7 +247,7 @@ describe('saving an entry', () => {
   it('counts its version up and says who saved', async () => {
     const entry = await addEntry(village.officer, calendar.id);
     api.clock.set(new Date('2026-12-02T06:00:00Z'));
-    const content = entryInput({ notes: 'Upper terraces first' });
+    const content = wholeEntry({ notes: 'Upper terraces first' });
     const saved = (
       await village.officer.put(`${entries}/${entry.id}`, { content, version: entry.version }).expect(200)
     ).body as Entry;
@@ -290,7 +291,7 @@ describe('saving an entry', () => {
   it('of what is stored already changes nothing', async () => {
     const { id, version } = await addEntry(village.officer, calendar.id);
     const again = await village.officer
-      .put(`${entries}/${id}`, { content: entryInput(), version })
+      .put(`${entries}/${id}`, { content: wholeEntry(), version })
       .expect(200);
     expect((again.body as Entry).version).toBe(version);
   });

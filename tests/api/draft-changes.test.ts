@@ -7,9 +7,9 @@ import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
   beginCalendar,
-  entryInput,
   openVillage,
   type Village,
+  wholeEntry,
 } from '#tests/support/calendar-api.js';
 import { addVariant } from '#tests/support/variant-api.js';
 
@@ -100,7 +100,7 @@ describe('a draft that is listened to', () => {
     expect(idsOf(await elder.next())).toEqual([first.id, second.id]);
 
     await colleague
-      .put(`${path}/${first.id}`, { content: entryInput({ crop: 'short millet' }), version: 1 })
+      .put(`${path}/${first.id}`, { content: wholeEntry({ crop: 'short millet' }), version: 1 })
       .expect(200);
     expect((await elder.next())?.entries[0]).toMatchObject({ entryId: first.id, version: 2 });
     await colleague

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import { EntryEntity } from '#server/db/entities/entry.entity.js';
 import { openTestApi, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -57,13 +58,16 @@ describe('the record of an event', () => {
     expect(await entriesOf(village.officer, calendar.id)).toEqual([]);
   });
 
-  it('that is begun and not whole keeps the submission back, and names its entry', async () => {
+  it('that is not whole, or not there, keeps the submission back, and names its entry', async () => {
     const { officer } = village;
     await addEntry(officer, calendar.id, { ...whole(), titleOfficer: 'Sow beans', ifLate: '' });
-    await addEntry(officer, calendar.id, { titleOfficer: 'Older, without a record' });
+    const old = await addEntry(officer, calendar.id, { titleOfficer: 'Older', record: undefined });
+    await api.dataSource.getRepository(EntryEntity).update({ id: old.id }, { isOlder: true });
+    expect((await entriesOf(officer, calendar.id)).map(({ isOlder }) => isOlder)).toEqual([undefined, true]);
+    await addEntry(officer, calendar.id, { titleOfficer: 'Nothing said', record: undefined });
     const answer = await officer.post(`/api/calendars/${calendar.id}/versions`);
     expect(reasonOf(answer)).toBe('409 record-incomplete');
-    expect((answer.body as Problem).names).toEqual(['Sow beans']);
+    expect((answer.body as Problem).names).toEqual(['Sow beans', 'Nothing said']);
   });
 
   it('of an entry that its people keep is theirs: it keeps nothing back and is not told of', async () => {

@@ -44,6 +44,7 @@ beforeAll(async () => {
   watch = await addEntry(officer, calendarId, {
     titleOfficer: 'Watch over the year’s end',
     kind: 'safety',
+    caution: 'The river rises at night.',
     protectiveWatch: true,
     lead: { type: 'fixed-date', date: { month: 12, day: 28 }, source: 'Water committee' },
     offsets: { earliestDays: 0, bestFromDays: 1, bestToDays: 7, lastAdvisedDays: 9 },

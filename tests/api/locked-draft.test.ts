@@ -13,6 +13,7 @@ import {
   takeBack,
   versionPath,
   type Village,
+  wholeEntry,
 } from '#tests/support/calendar-api.js';
 
 let api: TestApi;
@@ -54,7 +55,7 @@ describe('while a submission is out', () => {
     let { id, version } = await addEntry(village.officer, calendar.id);
     for (const notes of ['first', 'second', 'third', 'fourth']) {
       const [saved, submitted] = await Promise.all([
-        village.officer.put(`${entries}/${id}`, { content: entryInput({ notes }), version }),
+        village.officer.put(`${entries}/${id}`, { content: wholeEntry({ notes }), version }),
         village.officer.post(`/api/calendars/${calendar.id}/versions`),
       ]);
       expect(submitted.status).toBe(201);

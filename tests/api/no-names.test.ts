@@ -37,7 +37,7 @@ beforeAll(async () => {
   await call(village.elder, 'Heron Talvick');
   entry = await addEntry(village.officer, calendar.id, {
     ...{ titleOfficer: 'Mend the weir', otherSigns: SIGN, caution: SIGN, sharingLevel: 'open' },
-    ...{ giver: '', giverId: village.elder2.personId },
+    ...{ giver: 'A keeper', giverId: village.elder2.personId },
   });
   await addConsent(village.officer, 'entry', entry.id, { uses: [...CONSENT_USES] });
   await publishDraft(village, calendar.id);

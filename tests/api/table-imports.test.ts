@@ -5,6 +5,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { TableImport, TableInput, TableLine } from '#shared/contracts/imports.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import { CalendarEntity } from '#server/db/entities/calendar.entity.js';
+import { EntryEntity } from '#server/db/entities/entry.entity.js';
 import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
 import { daysBetween } from '#shared/kernel/iso-date.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
@@ -125,6 +126,9 @@ describe('a table', () => {
       .get(`/api/communities/${village.elder.communityId}/items/entry/${seen[2]?.id ?? ''}/consents`)
       .expect(200);
     expect(consents.body).toMatchObject({ items: [] });
+    const refused = await village.officer.post(`/api/calendars/${calendarId}/versions`);
+    expect((refused.body as Problem).names).toEqual(['Sow', 'First fruits']);
+    await api.dataSource.getRepository(EntryEntity).update({ calendarId }, { isOlder: true });
     const version = await submit(village.officer, calendarId);
     expect(reasonOf(await send(calendarId, input([line(SOW)])))).toBe('409 draft-locked');
     await takeBack(village.officer, version);
@@ -317,7 +321,7 @@ describe('a line that counts from other work', () => {
     const into = (await beginCalendar(village, years)).id;
     expect((await sent(into, input(linesOf(text)))).added).toBe(5);
     const withoutLevel = (csv: string) =>
-      Papa.parse<string[]>(csv).data.map((cells) =>
+      Papa.parse<string[]>(csv, { delimiter: ',' }).data.map((cells) =>
         cells.filter((_, index) => CALENDAR_CSV_COLUMNS[index]?.id !== 'level'),
       );
     expect(withoutLevel(await exported(into))).toEqual(withoutLevel(text));

@@ -13,6 +13,7 @@ import {
   openVillage,
   reasonOf,
   type Village,
+  wholeEntry,
 } from '#tests/support/calendar-api.js';
 
 /** A device that heard no answer sends its write again: with the same key it counts once, whatever came between. */
@@ -101,7 +102,7 @@ describe('a write with its key', () => {
 
   it('submits once, and what was added before is answered while the submission is out', async () => {
     const added = newKey();
-    const add = () => officer.post(entries(), entryInput()).set(WRITE_KEY_HEADER, added);
+    const add = () => officer.post(entries(), wholeEntry()).set(WRITE_KEY_HEADER, added);
     await add().expect(201);
     const key = newKey();
     const submit = () => officer.post(`/api/calendars/${calendarId}/versions`).set(WRITE_KEY_HEADER, key);

@@ -88,7 +88,7 @@ test('a record names what is still to be said, and the submission waits for it',
   await page.goto(new URL(page.url()).pathname);
   await page.getByRole('button', { name: 'Submit for review' }).click();
   const dialog = page.getByRole('dialog');
-  await expect(dialog.getByText(/1 entry does not say everything yet/)).toBeVisible();
+  await expect(dialog.getByText(/2 entries do not say everything yet/)).toBeVisible();
   await expect(dialog.getByRole('button', { name: 'Submit it' })).toHaveCount(0);
   await expectAccessible(page);
 });

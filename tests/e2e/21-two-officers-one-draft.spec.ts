@@ -6,7 +6,13 @@ import {
   expectNoSidewaysScroll,
   signIn,
 } from '#tests/support/journey-steps.js';
-import { beginEmptyCalendar, draftOf, makeIrvelOfficer, putIn } from '#tests/support/officer-pair.js';
+import {
+  beginEmptyCalendar,
+  draftOf,
+  makeIrvelOfficer,
+  putIn,
+  sayEverything,
+} from '#tests/support/officer-pair.js';
 
 /*
  * Two officers write one draft: each hears within seconds what the other saved and writes on; where both changed the same
@@ -185,6 +191,7 @@ test('what was on its way when the page went is sent again by itself, once', asy
     ['Sow', 'beans'],
   ]);
 
+  await sayEverything(page, calendarId);
   // Moved and submitted while answers are lost: done once each.
   await once(page, MISHAPS.lostOnTheWayBack);
   await page.goto(`/calendars/${calendarId}?entry=${id}`);

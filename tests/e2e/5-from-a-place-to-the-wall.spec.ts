@@ -7,6 +7,7 @@ import {
   expectNoSidewaysScroll,
   signIn,
 } from '#tests/support/journey-steps.js';
+import { sayEverything } from '#tests/support/officer-pair.js';
 
 /*
  * An officer with a new place: coordinates as degrees and minutes, a skyline from a pasted table, a calendar for 2027
@@ -43,6 +44,14 @@ test('an officer goes from an empty place to a submission of five entries', asyn
   }
   await expectAccessible(page);
 
+  calendarPath = new URL(page.url()).pathname;
+  await page.getByRole('button', { name: 'Submit for review' }).click();
+  const dialog = page.getByRole('dialog');
+  await expect(dialog.getByText(/^5 entries do not say everything yet/u)).toBeVisible();
+  await expect(dialog.getByText(/what to do if it is late/u).first()).toBeVisible();
+  await expect(dialog.getByRole('button', { name: 'Submit it' })).toHaveCount(0);
+  await sayEverything(page, calendarPath.replace(/^.*\//u, ''));
+  await page.goto(calendarPath);
   await page.getByRole('button', { name: 'Submit for review' }).click();
   await expect(page.getByText('5 entries as they are saved now, with their days')).toBeVisible();
   await page
@@ -51,7 +60,6 @@ test('an officer goes from an empty place to a submission of five entries', asyn
     .click();
   await expect(page.getByRole('heading', { name: 'Submission 1' })).toBeVisible();
   await expect(page.getByText('In review').first()).toBeVisible();
-  calendarPath = new URL(page.url()).pathname.replace(/\/versions.*$/u, '');
 });
 
 test('elders and the steward sign it, the officer publishes it, staff print it', async ({

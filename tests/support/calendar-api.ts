@@ -8,6 +8,7 @@ import { MembershipEntity } from '#server/db/entities/membership.entity.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import type { Response } from 'supertest';
 import type { Client, TestApi } from './api.js';
+import { withoutSigns } from './event-record.js';
 
 /** Whom the demo village needs to bring a calendar from nothing to the wall. */
 export interface Village {
@@ -64,12 +65,20 @@ export async function beginCalendar(village: Village, year = 2027): Promise<Cale
   return (await officer.post(path, { placeId, year }).expect(201)).body as Calendar;
 }
 
+/** Everything said that elders may want to know: such an entry keeps no submission back. */
+export function wholeEntry(changes: Partial<EntryInput> = {}): EntryInput {
+  return entryInput({
+    ...{ giver: 'Elder A-1', ifLate: 'Ask the office.', record: withoutSigns() },
+    ...changes,
+  });
+}
+
 export async function addEntry(
   officer: Client,
   calendarId: string,
   changes: Partial<EntryInput> = {},
 ): Promise<Entry> {
-  const answer = await officer.post(`/api/calendars/${calendarId}/entries`, entryInput(changes)).expect(201);
+  const answer = await officer.post(`/api/calendars/${calendarId}/entries`, wholeEntry(changes)).expect(201);
   return answer.body as Entry;
 }
 

@@ -1,5 +1,12 @@
 import { EMPTY_RECORD, type EventRecord } from '#shared/contracts/event-record.js';
 
+/** As whole, of work that waits for no signs. */
+export function withoutSigns(): EventRecord {
+  const { what } = wholeRecord();
+  const { variety } = EMPTY_RECORD.what;
+  return wholeRecord({ what: { ...what, operation: 'weed', variety }, signs: EMPTY_RECORD.signs });
+}
+
 /** A whole record of sowing: nothing that its kind needs is left unsaid. */
 export function wholeRecord(changes: Partial<EventRecord> = {}): EventRecord {
   const check = { office: 'Agricultural office', name: 'R. Ansel', day: '2027-02-03' };

@@ -1,5 +1,6 @@
 import type { Page } from '@playwright/test';
 import { expect } from '@playwright/test';
+import { withoutSigns } from './event-record.js';
 import { signIn } from './journey-steps.js';
 
 /** Calls the API with the sign-in of a page. */
@@ -65,7 +66,20 @@ export function putIn(
   });
 }
 
+/** Everything is said of every entry: elders may be asked about the draft. */
+export async function sayEverything(officer: Page, calendarId: string): Promise<void> {
+  for (const { id, version, content } of await draftOf(officer, calendarId)) {
+    const said = { ...content, titleVillage: content.titleOfficer, crop: content.crop || 'millet' };
+    await send(officer, 'PUT', `/api/calendars/${calendarId}/entries/${id}`, {
+      version,
+      content: { ...said, giver: 'Elder A-1', ifLate: 'Ask the office.', record: withoutSigns() },
+    });
+  }
+}
+
 export interface DraftLine {
+  id: string;
+  version: number;
   content: { titleOfficer: string; crop: string };
 }
 

@@ -28,6 +28,10 @@ export class EntryEntity extends WrittenEntity {
   @Column({ name: 'deleted_at', ...instantColumn, nullable: true })
   deletedAt!: Date | null;
 
+  /** Of the time before there were records: none is asked for until something of it is said. */
+  @Column({ name: 'is_older', type: 'boolean', default: false })
+  isOlder!: boolean;
+
   /** Set back to an old version then: answers to what stood in versions before do not count for it. */
   @Column({ name: 'restored_at', ...instantColumn, nullable: true })
   restoredAt!: Date | null;

@@ -65,6 +65,7 @@ export function toEntry(facts: EntryFacts): Entry {
     updatedBy: updatedByName,
     updatedAt: row.updatedAt.toISOString(),
     mine,
+    ...(row.isOlder && { isOlder: true as const }),
     ...(actual && { actual }),
     ...(advice.length > 0 && { advice: [...advice] }),
   };

@@ -3,6 +3,7 @@ import type { Role } from '#shared/contracts/people.js';
 import { addDays, subDays } from 'date-fns';
 import type { DataSource, EntityManager } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import type { Actor } from '../../http/actor.js';
@@ -135,6 +136,8 @@ class DemoRound {
     const { elder3 } = this.cast;
     const withheld = { ...WITHHELD_ENTRY, giverId: elder3.person.id };
     this.withheldId = (await this.entries.add(elder3, id, withheld)).id;
+    // They tell of a time before there were records.
+    await this.manager.update(EntryEntity, { calendarId: id }, { isOlder: true });
     await this.agree();
     this.daysLater(3);
   }

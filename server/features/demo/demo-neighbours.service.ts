@@ -2,6 +2,7 @@ import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { addDays, subDays } from 'date-fns';
 import type { DataSource } from 'typeorm';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { MembershipEntity } from '../../db/entities/membership.entity.js';
 import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
@@ -123,6 +124,8 @@ class NeighbourRound {
       await variants.add(officer, id, idByCode.get(code) ?? '', { ...content, giverId });
     }
     const keptId = await this.keep(entries, id, await this.groupId());
+    // They tell of a time before there were records.
+    await dataSource.manager.update(EntryEntity, { calendarId: id }, { isOlder: true });
     this.at = addDays(this.at, 3);
     const versions = new VersionsService(dataSource, clock);
     const contents = new FrozenContentService(dataSource, clock, sky);

@@ -32,6 +32,7 @@ export async function carryOver(
       calendarId,
       position: row.position,
       content: nextYears(row.content, newIdOf),
+      isOlder: row.isOlder,
       deletedAt: null,
       updatedBy: row.updatedBy,
       updatedAt: at,

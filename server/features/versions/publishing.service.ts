@@ -3,10 +3,11 @@ import { mayBecome, versionLabel, type VersionState } from '#shared/calendar/ver
 import type { AuditAction } from '#shared/contracts/audit.js';
 import type { Version, VersionEntryBody } from '#shared/contracts/versions.js';
 import { randomUUID } from 'node:crypto';
-import type { DataSource, EntityManager } from 'typeorm';
+import { In, type DataSource, type EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
 import { CommunityEntity } from '../../db/entities/community.entity.js';
+import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { VersionVariantEntity } from '../../db/entities/version-variant.entity.js';
 import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { inTransaction } from '../../db/in-transaction.js';
@@ -154,7 +155,8 @@ export class PublishingService {
   }
 
   /**
-   * A record that is begun says what its kind needs before anybody is asked about it. Of entries that the submitting
+   * An entry says what its kind needs before anybody is asked about it; one of the time before there were records may do
+   * without, until one is begun. Of entries that the submitting
    * person does not see nothing is asked: their people answer for them, and a refusal would tell of them.
    */
   private async expectRecordsComplete(
@@ -167,8 +169,16 @@ export class PublishingService {
       await viewerOf(manager, actor, this.clock.now()),
       entries.map(thingOf),
     );
+    const ids = entries.map(({ entryId }) => entryId);
+    const older = await manager.find(EntryEntity, {
+      select: { id: true },
+      where: { id: In(ids), isOlder: true },
+    });
+    const olderIds = new Set(older.map(({ id }) => id));
     const incomplete = entries.filter(
-      (entry) => sight.appearance(thingOf(entry)) === 'full' && signOffNeeds(entry.content).length > 0,
+      (entry) =>
+        sight.appearance(thingOf(entry)) === 'full' &&
+        signOffNeeds(entry.content, olderIds.has(entry.entryId)).length > 0,
     );
     if (incomplete.length > 0) {
       throw conflict(

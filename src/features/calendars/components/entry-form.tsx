@@ -120,7 +120,7 @@ export function EntryForm({ editor, entry, form, saving, actions }: EntryFormPro
             home={saved ? { calendarId: editor.calendar.id, entryId: saved.id } : undefined}
           />
           <GroupFolds form={form} groups={groups} onSearch={search} />
-          <RecordNeeds content={entry.content} />
+          <RecordNeeds form={form} isOlder={saved?.isOlder ?? false} />
           {saved && (
             <ActualDaysPanel calendarId={editor.calendar.id} year={editor.calendar.year} entry={saved} />
           )}

@@ -15,7 +15,7 @@ export interface SubmitChecks {
   remarked: ShownEntry[];
   /** Farm work that does not say what to do if it is late. */
   withoutLate: ShownEntry[];
-  /** With a record that does not say everything yet: the server refuses a submission with them. */
+  /** That do not say everything yet: the server refuses a submission with them. */
   incomplete: { entry: ShownEntry; needs: SignOffNeed[] }[];
   /** Written before there were records: they go out as they are. */
   withoutRecord: ShownEntry[];
@@ -49,9 +49,9 @@ export function submitChecks(
     remarked: saved.filter((entry) => entry.saved.dates.warnings.length > 0),
     withoutLate: saved.filter(({ saved: { content } }) => content.kind === 'farm' && content.ifLate === ''),
     incomplete: saved
-      .map((entry) => ({ entry, needs: signOffNeeds(entry.saved.content) }))
+      .map((entry) => ({ entry, needs: signOffNeeds(entry.saved.content, entry.saved.isOlder) }))
       .filter(({ needs }) => needs.length > 0),
-    withoutRecord: saved.filter(({ saved: { content } }) => content.record === undefined),
+    withoutRecord: saved.filter(({ saved }) => saved.isOlder === true && saved.content.record === undefined),
     entryCount: saved.length,
     markerCount: markers.size,
   };

@@ -14,8 +14,16 @@ const sowing = (changes: Partial<EntryInput> = {}) =>
   });
 
 describe('what an event must say before elders are asked', () => {
-  it('is nothing where an entry has no record: older ones go on', () => {
-    expect(signOffNeeds(content({ record: undefined, giver: '' }))).toEqual([]);
+  it('is all that its kind needs where it has no record, and nothing for an entry of the time before', () => {
+    const bare = content({ record: undefined, titleVillage: '', giver: '', crop: '' });
+    expect(signOffNeeds(bare)).toEqual(signOffNeeds({ ...bare, record: EMPTY_RECORD }));
+    expect(signOffNeeds(bare)).toContain('ifLate');
+    expect(signOffNeeds(bare, true)).toEqual([]);
+  });
+
+  it('is all of it for an older entry, too, once something of its record is said', () => {
+    const record = { ...EMPTY_RECORD, trust: { ...EMPTY_RECORD.trust, confidence: 'fair' as const } };
+    expect(signOffNeeds(content({ record }), true)).toContain('responsible');
   });
 
   it('is nothing more where all is said, and such an entry is accepted', () => {
