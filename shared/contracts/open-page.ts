@@ -24,7 +24,8 @@ const openEntry = z.strictObject({
   titleOfficer: z.string(),
   kind: entryKind,
   icon: entryIcon,
-  kindWord: z.string().optional(),
+  /** What the village calls its kind, where it has a word of its own; else empty. */
+  kindWord: z.string(),
   crop: z.string(),
   otherSigns: z.string(),
   ifLate: z.string(),
@@ -54,6 +55,7 @@ export type OpenPage = z.infer<typeof openPage>;
 export const OPEN_WORDS = [
   'titleVillage',
   'titleOfficer',
+  'kindWord',
   'crop',
   'otherSigns',
   'ifLate',

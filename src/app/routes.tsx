@@ -131,6 +131,7 @@ export const villageRoutes: readonly AppRoute[] = [
       'sharing',
       'exports',
       'open',
+      'consents',
       'moves',
     ],
     load: () => import('./routes/version.js'),

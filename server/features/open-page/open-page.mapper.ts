@@ -24,7 +24,7 @@ export function toOpenEntry(body: VersionEntryBody): OpenEntry {
   const { titleVillage, titleOfficer, kind, icon, crop, otherSigns, ifLate, caution, lead } = content;
   return {
     ...{ entryId, titleVillage, titleOfficer, kind, icon, crop, otherSigns, ifLate, caution },
-    ...(content.kindWord && { kindWord: content.kindWord.word }),
+    kindWord: content.kindWord?.word ?? '',
     protectiveWatch: content.protectiveWatch,
     window: boardOf(body).window,
     star: isStarLead(lead) ? { markerKey: lead.markerKey, phenomenon: lead.phenomenon } : null,

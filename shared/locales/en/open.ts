@@ -9,7 +9,7 @@ export const texts = {
   south: '{{degrees}}° south',
   east: '{{degrees}}° east',
   west: '{{degrees}}° west',
-  issue: '{{label}}, published on {{date}}',
+  issue: 'Calendar {{label}}, published on {{date}}',
   gone: 'There is no such page',
   goneWhy: 'The village has switched it off, or the address is not whole. Ask whoever gave it to you.',
   nothing: 'Nothing is published for everybody yet',
@@ -102,6 +102,7 @@ export const texts = {
       word: {
         titleVillage: 'Name in the village',
         titleOfficer: 'Name for the office',
+        kindWord: 'The village’s word for its kind',
         crop: 'Crop or variety',
         otherSigns: 'Other signs',
         ifLate: 'If late',

@@ -59,6 +59,7 @@ function Awaited({ itemType, what, things }: AwaitedGroup) {
           <li key={itemId}>
             <ButtonLink
               look="quiet"
+              className="text-start"
               to={isToAsk ? paths.itemConsents(itemType, itemId) : paths.figure(itemId)}
             >
               {label === null

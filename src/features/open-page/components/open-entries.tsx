@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import type { OpenEntry, OpenPage } from '#shared/contracts/open-page.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
 import { markerName } from '#src/lib/marker-names.js';
+import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 
 interface OpenEntriesProps {
   entries: readonly OpenEntry[];
@@ -13,9 +14,12 @@ interface OpenEntriesProps {
 export function OpenEntries({ entries, markers, year }: OpenEntriesProps) {
   const byDay = entries.toSorted((a, b) => dayOf(a).localeCompare(dayOf(b)));
   return (
-    <ul className="grid gap-4">
+    <ul className="gap-x-8 wide:columns-2 print:columns-2">
       {byDay.map((entry) => (
-        <li key={entry.entryId} className="border-t border-hairline pt-3 first:border-0 first:pt-0">
+        <li
+          key={entry.entryId}
+          className="break-inside-avoid border-t border-hairline py-3 first:border-0 first:pt-0"
+        >
           <Entry entry={entry} markers={markers} year={year} />
         </li>
       ))}
@@ -36,13 +40,20 @@ function Entry({ entry, markers, year }: { entry: OpenEntry } & Omit<OpenEntries
   const names = markers.find(({ markerKey }) => markerKey === star?.markerKey);
   return (
     <article>
-      <h3 className="text-body">{titleOfficer}</h3>
-      {titleVillage !== '' && titleVillage !== titleOfficer && <p className="own-words">{titleVillage}</p>}
+      <div className="flex items-start gap-3">
+        <SignIcon sign={entry.icon} size={36} className="flex-none" />
+        <div className="min-w-0">
+          <h3 className="text-body font-bold">{titleOfficer}</h3>
+          {titleVillage !== '' && titleVillage !== titleOfficer && (
+            <p className="own-words">{titleVillage}</p>
+          )}
+        </div>
+      </div>
       <p>
         <strong>{window ? words.window(entry, window, year) : t('open:noDay')}</strong>
       </p>
       {window && <p>{words.windowSentence(window)}</p>}
-      <p className="text-small">{entry.kindWord ?? t(`calendars:kind.${kind}`)}</p>
+      <p className="text-small">{entry.kindWord === '' ? t(`calendars:kind.${kind}`) : entry.kindWord}</p>
       {star && names && (
         <p>
           {t('open:goesBy', { star: markerName(names), phenomenon: t(`sky:phenomenon.${star.phenomenon}`) })}
