@@ -213,10 +213,19 @@ describe('the page of the day', () => {
 
 describe('a star as seen this year', () => {
   it('is counted from the day on which it was seen, with the computed days beside', async () => {
-    const { officer } = village;
+    let { officer } = village;
     const lead = { markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 } as const;
     const computed = await addEntry(officer, calendar.id, { lead: { type: 'marker', ...lead } });
     const seen = { date: '2027-06-12', by: 'Tirel', agreedBy: 'Elder A-1' };
+    const early = await officer.post(
+      `/api/calendars/${calendar.id}/entries`,
+      entryInput({ lead: { type: 'marker-as-seen', ...lead, seen } }),
+    );
+    expect((early.body as Problem).errors).toMatchObject([
+      { field: 'lead.seen.date', code: 'in-the-future' },
+    ]);
+    api.clock.set(new Date('2027-06-12T09:00:00Z'));
+    officer = await api.signIn('officer');
     const entry = await addEntry(officer, calendar.id, { lead: { type: 'marker-as-seen', ...lead, seen } });
     expect(entry.dates.marker).toEqual(computed.dates.marker);
     expect(entry.dates.window?.bestFrom).toBe('2027-06-19');

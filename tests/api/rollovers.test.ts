@@ -69,6 +69,8 @@ describe('rolling over to the next year', () => {
   it('tells the year from what people changed since: air, days from the lead, and a day that was seen', async () => {
     const star = { markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 } as const;
     const seen = { date: '2027-06-29', by: 'Marrun', agreedBy: 'A-1' };
+    api.clock.set(new Date('2027-07-01T09:00:00Z'));
+    village = await openVillage(api);
     await addEntry(village.officer, calendar.id, { lead: { type: 'marker-as-seen', ...star, seen } });
     const next = await rolledOver();
     const [sow] = await entriesOf(village.officer, next);
@@ -181,7 +183,9 @@ describe('what goes along into the next year', () => {
       titleOfficer: 'Weed',
       lead: { type: 'entry-planned', entryId: entry.id, day: 'bestTo' },
     });
-    await addEntry(officer, calendar.id, {
+    api.clock.set(new Date('2027-07-01T09:00:00Z'));
+    village = await openVillage(api);
+    await addEntry(village.officer, calendar.id, {
       titleOfficer: 'Mend',
       lead: {
         ...{ type: 'marker-as-seen', markerKey: 'pleiades', phenomenon: 'heliacal-rising', occurrence: 1 },

@@ -224,14 +224,9 @@ export class EntriesService {
     field: string,
   ): Promise<void> {
     const { content } = await liveEntry(manager, calendarId, entryId);
-    expectSeenInYear(content, year, field);
-    await expectGoodAnchor(
-      manager,
-      await this.viewer(manager, actor),
-      calendarId,
-      { id: entryId, content },
-      field,
-    );
+    const viewer = await this.viewer(manager, actor);
+    expectSeenInYear(content, { year, today: viewer.today }, field);
+    await expectGoodAnchor(manager, viewer, calendarId, { id: entryId, content }, field);
   }
 
   private touched(actor: Actor, change: { deletedAt: Date | null } = { deletedAt: null }) {

@@ -36,12 +36,17 @@ export async function expectKnownMarker(
   );
 }
 
-/** What was seen belongs to the calendar's year, or comes just before or after it. */
-export function expectSeenInYear({ lead }: EntryInput, year: number, field: string): void {
+/** What was seen belongs to the calendar's year, or comes just before or after it; and its day has come. */
+export function expectSeenInYear(
+  { lead }: EntryInput,
+  { year, today }: { year: number; today: string },
+  field: string,
+): void {
   if (lead.type !== 'marker-as-seen' || lead.seen === null) return;
   if (Math.abs(Number(lead.seen.date.slice(0, 4)) - year) > 1) {
     throw invalidField(`${field}.seen.date`, 'not-of-this-year');
   }
+  if (lead.seen.date > today) throw invalidField(`${field}.seen.date`, 'in-the-future');
 }
 
 /** Names of the fields that differ; what stands in them stays out of the record. */

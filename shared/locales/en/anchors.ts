@@ -62,6 +62,7 @@ export const texts = {
     },
   },
   form: {
+    chooseFirst: 'Its days are counted once a work is chosen that does not wait for this one.',
     seen: 'It was seen this year',
     seenOn: 'On which morning or evening',
     seenBy: 'Who saw it',

@@ -9,6 +9,8 @@ export const texts = {
   yearFrom: 'The year begins',
   yearFromCivil: 'on 1 January',
   yearFromLocal: 'on {{day}}, as here',
+  beside_one: 'Without a bar, because its days lie beyond this year: {{titles}}.',
+  beside_other: 'Without a bar, because their days lie beyond this year: {{titles}}.',
   secondScale: 'Second scale',
   scale: {
     none: 'None',

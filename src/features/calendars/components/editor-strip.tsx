@@ -12,7 +12,7 @@ import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
 import { YearBoard } from '#src/ui/pictures/year-board.js';
 import type { ShownEntry } from '../model/preview-dates.js';
-import { barsOf, lanesOf, pairingOf, undatedOf } from '../model/strip-model.js';
+import { barsOf, besideOf, lanesOf, pairingOf, undatedOf } from '../model/strip-model.js';
 import type { Editor } from '../model/use-editor.js';
 import type { DraftChange } from '../model/use-entry-edits.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
@@ -38,6 +38,7 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
   const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
   const nameOf = (entry: ShownEntry) => entry.content.titleOfficer || t('editor.untitled');
   const undated = undatedOf(shown);
+  const beside = besideOf(shown, strip.whole);
   const inTable = (entryId: string, change: DraftChange) => {
     const entry = shown.find(({ id }) => id === entryId);
     if (entry) changeEntry(editor, entry, change);
@@ -99,6 +100,14 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
             year,
             count: undated.length,
             titles: listWords(undated.map(nameOf), i18n.language),
+          })}
+        </p>
+      )}
+      {beside.length > 0 && (
+        <p className="text-small text-umber-soft">
+          {t('strip:beside', {
+            count: beside.length,
+            titles: listWords(beside.map(nameOf), i18n.language),
           })}
         </p>
       )}

@@ -65,7 +65,11 @@ export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
       <div className="grid gap-3">
         <p>
           {dates?.marker && <strong>{days.about(dates.marker)}. </strong>}
-          {dates?.counted ? counted(dates.counted) : <CountedFrom form={form} />}
+          {dates?.counted && dates.counted.basis !== 'gone' ? (
+            counted(dates.counted)
+          ) : (
+            <CountedFrom form={form} />
+          )}
         </p>
         <OffsetSteppers form={form} />
         <WindowPicture form={form} />
@@ -77,11 +81,16 @@ export function WhenFields({ form, onSearch, timingOnly }: WhenFieldsProps) {
 
 /** From which day the steps are counted. */
 function CountedFrom({ form }: { form: FormState }) {
-  const { t } = useTranslation('calendars');
+  const { t } = useTranslation(['calendars', 'anchors']);
   const dateWords = useDateWords();
-  const { draft, dates, year, content } = form;
+  const counted = useCountedWords();
+  const { draft, dates, year, content, circle } = form;
   if (draft.leadType === 'fixed-date') {
     return t('form.daysFromDate', { day: dateWords.day({ year, ...draft.fixed.date }) });
+  }
+  if (dates?.counted) {
+    const isThere = draft.anchor.entryId === '' || circle !== null;
+    return isThere ? t('anchors:form.chooseFirst') : counted(dates.counted);
   }
   if (!dates?.marker) return t('form.daysFromNothing');
   if (content.lead.type === 'sky') {

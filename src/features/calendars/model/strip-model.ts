@@ -3,6 +3,7 @@ import type { EntryLead } from '#shared/contracts/calendars.js';
 import type { MarkerRow } from '#shared/contracts/stars.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { windowDayNumbers } from '#src/lib/entry-words.js';
+import type { DaySpan } from '#src/ui/pictures/day-span.js';
 import type { BoardBar, BoardPairing } from '#src/ui/pictures/year-board.js';
 import type { Markers, ShownEntry } from './preview-dates.js';
 
@@ -45,6 +46,14 @@ export function pairingOf(entry: ShownEntry | null): BoardPairing | null {
   const laneKey = entry && laneKeyOf(entry.content.lead);
   if (laneKey === null || !entry?.dates?.marker) return null;
   return { laneKey, dayNumber: entry.dates.marker.expected.dayNumber };
+}
+
+/** Entries whose days lie wholly beside the year that the strip shows, such as what follows on work of December. */
+export function besideOf(entries: readonly ShownEntry[], { first, last }: DaySpan): ShownEntry[] {
+  return entries.filter(({ dates }) => {
+    const days = dates?.window ? windowDayNumbers(dates.window) : null;
+    return days !== null && (days.lastAdvised < first || days.earliest > last);
+  });
 }
 
 /** Entries whose lead brings no day this year. One that goes by nothing yet is not among them. */

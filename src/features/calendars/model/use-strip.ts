@@ -32,6 +32,7 @@ export function useStrip(editor: Editor) {
   return {
     zoom,
     span,
+    whole,
     months,
     settings,
     second: useSecondScale(editor, settings, span),

@@ -1,6 +1,12 @@
 import { describe, expect, it } from 'vitest';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
-import { barsOf, lanesOf, pairingOf, undatedOf } from '#src/features/calendars/model/strip-model.js';
+import {
+  barsOf,
+  besideOf,
+  lanesOf,
+  pairingOf,
+  undatedOf,
+} from '#src/features/calendars/model/strip-model.js';
 import type { ShownEntry } from '#src/features/calendars/model/preview-dates.js';
 import { entryOf, tazimelMarkers } from '#tests/support/draft-of-tazimel.js';
 
@@ -30,6 +36,15 @@ describe('the year’s strip', () => {
     expect(bar?.days.earliest).toBe(dayNumberFromIso(entries[0]?.dates?.window?.earliest ?? ''));
     const begun: ShownEntry = { ...shown(3), saved: null, dates: null };
     expect(undatedOf([...entries, begun])).toEqual([undated]);
+  });
+
+  it('names what lies wholly beside the year, and nothing that reaches into it', () => {
+    const late = { lead: { type: 'fixed-date', date: { month: 12, day: 30 }, source: 'office' } };
+    const offsets = { earliestDays: 1, bestFromDays: 5, bestToDays: 9, lastAdvisedDays: 12 };
+    const year = { first: dayNumberFromIso('2027-01-01'), last: dayNumberFromIso('2027-12-31') };
+    const reaching = shown(1, { ...late, offsets });
+    const after = shown(2, { ...late, offsets: { ...offsets, earliestDays: 2 } });
+    expect(besideOf([reaching, after, shown(3), shown(4, goesBy('hr424'))], year)).toEqual([after]);
   });
 
   it('joins a window to its star’s day, and a fixed date to nothing', () => {
