@@ -4,7 +4,7 @@ import { chromium, type BrowserContext } from '@playwright/test';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openClient, signInAs, type Client } from '#tests/support/api.js';
-import { entryInput, submit, takeBack } from '#tests/support/calendar-api.js';
+import { submit, takeBack, wholeEntry } from '#tests/support/calendar-api.js';
 import playwrightConfig from '../../playwright.config.js';
 import { onBuiltProduct } from './built-product.js';
 import { firstRowsMs, stripTimes } from './editor-page.js';
@@ -100,7 +100,7 @@ async function fillCalendar(officer: Client, year: number, entries: number): Pro
       index % 2 === 0
         ? ({ type: 'marker', markerKey, phenomenon: 'heliacal-rising', occurrence: 1 } as const)
         : ({ type: 'fixed-date', date, source: 'the office' } as const);
-    const content = entryInput({ titleOfficer: `Work ${index + 1}`, crop: `plot ${index + 1}`, lead });
+    const content = wholeEntry({ titleOfficer: `Work ${index + 1}`, crop: `plot ${index + 1}`, lead });
     await officer.post(`/api/calendars/${calendar.id}/entries`, content).expect(201);
   }
   return calendar;
