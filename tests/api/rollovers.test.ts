@@ -193,7 +193,7 @@ describe('what goes along into the next year', () => {
       },
     });
     const next = await rolledOver();
-    const [sow, weed, mend] = await entriesOf(officer, next);
+    const [sow, weed, mend] = await entriesOf(village.officer, next);
     expect(weed?.content.lead).toMatchObject({ type: 'entry-planned', entryId: sow?.id });
     expect(weed?.dates.window?.bestFrom).toMatch(/^2028-/u);
     expect(hung.dates.window?.bestFrom).toMatch(/^2027-/u);
