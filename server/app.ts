@@ -1,4 +1,4 @@
-import { OPEN_PAGE_PATH } from '#shared/contracts/open-page.js';
+import { OPEN_PAGE_PATH } from '#shared/contracts/open-page-path.js';
 import compression from 'compression';
 import express, { type Express } from 'express';
 import helmet from 'helmet';

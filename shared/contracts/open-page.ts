@@ -192,6 +192,3 @@ export const openPageEndpoints = {
     params,
   }),
 } as const;
-
-/** The page that a telephone opens; the key stands behind it in the query. */
-export const OPEN_PAGE_PATH = '/open';

@@ -1,4 +1,4 @@
-import { OPEN_PAGE_PATH } from '#shared/contracts/open-page.js';
+import { OPEN_PAGE_PATH } from '#shared/contracts/open-page-path.js';
 import type { SharedItemType } from '#shared/contracts/sharing.js';
 
 /** Every address of the application, in one place. `pattern` is for the router, the rest for links. */

@@ -1,4 +1,4 @@
-import { OPEN_PAGE_PATH } from '#shared/contracts/open-page.js';
+import { OPEN_PAGE_PATH } from '#shared/contracts/open-page-path.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import { layoutOpenPageCard } from '#shared/sheet/open-page-card.js';
 import QRCode from 'qrcode';
