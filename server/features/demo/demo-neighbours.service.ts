@@ -8,18 +8,12 @@ import { PlaceEntity } from '../../db/entities/place.entity.js';
 import { VillageGroupEntity } from '../../db/entities/village-group.entity.js';
 import type { Actor } from '../../http/actor.js';
 import type { Clock } from '../../http/context.js';
-import { CalendarsService } from '../calendars/calendars.service.js';
-import { EntriesService } from '../calendars/entries.service.js';
-import { SkyDatesService } from '../calendars/sky-dates.service.js';
-import { CardSignInService } from '../cards/card-sign-in.service.js';
-import { AnswersService } from '../reviews/answers.service.js';
+import type { EntriesService } from '../calendars/entries.service.js';
+import type { AnswersService } from '../reviews/answers.service.js';
 import { OwnAnswersService } from '../reviews/own-answers.service.js';
-import { SigningService } from '../reviews/signing.service.js';
+import type { SigningService } from '../reviews/signing.service.js';
 import { GroupsService } from '../sharing/groups.service.js';
-import { VariantsService } from '../variants/variants.service.js';
-import { FrozenContentService } from '../versions/frozen-content.service.js';
-import { PublishingService } from '../versions/publishing.service.js';
-import { VersionsService } from '../versions/versions.service.js';
+import { demoStage } from './demo-stage.service.js';
 import { withKnownWork, type DemoEntry, type DemoVariant } from './demo-entry.js';
 import { DEMO_DOMAIN, THOLMERE_LANDING, VARDESCA_TERRACES, type DemoVillage } from './demo-villages.data.js';
 import { BERRY_WEEK, THOLMERE_ENTRIES, THOLMERE_VARIANTS } from './tholmere-entries.data.js';
@@ -108,17 +102,13 @@ class NeighbourRound {
   private async playAt(placeId: string): Promise<void> {
     const { dataSource, neighbour } = this;
     const clock = { now: () => this.at };
-    const sky = new SkyDatesService();
-    const entries = new EntriesService(dataSource, clock, sky);
+    const { calendars, entries, variants, publishing, answers, signing } = demoStage(dataSource, clock);
     const officer = this.person(neighbour.officer);
-    const { id } = await new CalendarsService(dataSource, clock).create(officer, {
-      ...{ placeId, year: DEMO_YEAR },
-    });
+    const { id } = await calendars.create(officer, { placeId, year: DEMO_YEAR });
     const idByCode = new Map<string, string>();
     for (const { code, content } of neighbour.entries) {
       idByCode.set(code, (await entries.add(officer, id, withKnownWork(content, idByCode))).id);
     }
-    const variants = new VariantsService(dataSource, clock, sky);
     for (const { code, by, content } of neighbour.variants) {
       const giverId = by === null ? null : this.person(by).person.id;
       await variants.add(officer, id, idByCode.get(code) ?? '', { ...content, giverId });
@@ -127,14 +117,11 @@ class NeighbourRound {
     // They tell of a time before there were records.
     await dataSource.manager.update(EntryEntity, { calendarId: id }, { isOlder: true });
     this.at = addDays(this.at, 3);
-    const versions = new VersionsService(dataSource, clock);
-    const contents = new FrozenContentService(dataSource, clock, sky);
-    const publishing = new PublishingService(dataSource, clock, contents, versions);
     const { number } = await publishing.submit(officer, id);
     this.at = addDays(this.at, 3);
-    await this.answer(id, number, [...idByCode.values()]);
+    await this.answer(answers, id, number, [...idByCode.values()]);
     if (neighbour.signers.length === 0) return;
-    await this.sign(id, number, keptId, new SigningService(dataSource, clock, versions));
+    await this.sign(id, number, keptId, signing);
     await publishing.publish(officer, id, number);
   }
 
@@ -160,16 +147,12 @@ class NeighbourRound {
   }
 
   /** Everybody who signs answers every entry of the village; else one has begun. */
-  private async answer(calendarId: string, number: number, entryIds: readonly string[]): Promise<void> {
-    const clock = { now: () => this.at };
-    const answers = new AnswersService(
-      this.dataSource,
-      clock,
-      new CardSignInService(this.dataSource, clock),
-      {
-        keepWith: () => Promise.reject(new Error('Nobody speaks in the demo')),
-      },
-    );
+  private async answer(
+    answers: AnswersService,
+    calendarId: string,
+    number: number,
+    entryIds: readonly string[],
+  ): Promise<void> {
     const { signers, firstToAnswer } = this.neighbour;
     const who = signers.length > 0 ? signers : [firstToAnswer];
     const asked = signers.length > 0 ? entryIds : entryIds.slice(0, ANSWERED_AT_FIRST);
