@@ -68,6 +68,7 @@ class DemoRound {
     await this.compile();
     await this.firstRound();
     await this.secondRound();
+    await this.yearBefore.tickOff(this.calendarId, this.at);
   }
 
   private async compile(): Promise<void> {
@@ -90,7 +91,6 @@ class DemoRound {
     await this.manager.update(EntryEntity, { calendarId: id }, { isOlder: true });
     await this.agree();
     this.daysLater(3);
-    await this.yearBefore.tickOff(id, this.at);
   }
 
   /** What was said to the officer who asked; what Elder A-3 keeps they agreed to themself. */

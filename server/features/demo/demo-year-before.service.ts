@@ -68,7 +68,7 @@ export class YearBefore {
     });
   }
 
-  /** What was decided and is done already when the next year's draft is sent to the elders. */
+  /** What was decided and is done already in the next year's draft. */
   async tickOff(nextCalendarId: string, at: Date): Promise<void> {
     const tasks = new SeasonTasksService(this.dataSource, { now: () => at });
     for (const id of this.taskIds) await tasks.tick(this.cast.officer, nextCalendarId, id);
