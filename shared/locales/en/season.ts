@@ -5,7 +5,7 @@ export const texts = {
   underDraft: '{{place}}. By the draft: nothing is published',
   lead: 'For the meeting at the end of the season: what was planned beside what happened. Nobody is right or wrong here, and nothing is averaged.',
   trouble: 'The year could not be brought up',
-  print: 'Print it on one page',
+  print: 'Print it on A4',
   nothing: 'No entry of this year is there for you to see.',
   entries: 'Entry by entry',
   wholeYear: 'The year as a whole',
@@ -112,6 +112,8 @@ export const texts = {
     notYet: '–',
     decided: '→ {{task}}',
     decidedDone: '✓ {{task}}',
-    legend: '→ decided for {{year}}, ✓ done there. Each place prints what its reader may see.',
+    running: '{{title}}. {{under}}',
+    page: 'Page {{page}} of {{pages}}',
+    legend: '→ decided for {{year}}, ✓ done there. It holds what whoever printed it may see.',
   },
 } as const;

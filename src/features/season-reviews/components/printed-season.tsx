@@ -3,9 +3,13 @@ import { useTranslation } from 'react-i18next';
 import type { Decision, Lesson, SeasonReview } from '#shared/contracts/season-reviews.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useSeasonWords, type SeasonWords } from '../model/season-words.js';
+import { PAGE, PAGES, pageHeads } from '../model/page-heads.js';
 import { COLUMN_SHARES, sheetSize } from '../model/sheet-size.js';
 
-/** The year as a table on one page of A4, for the wall of the meeting. On the screen it is not there. */
+/** Letters of a cell from which its row may go on over the end of a page. */
+const LONG_CELL = 1200;
+
+/** The year as a table for the wall of the meeting: on one page of A4, or on numbered ones. On the screen it is not there. */
 export function PrintedSeason({ review }: { review: SeasonReview }) {
   const { t } = useTranslation('season');
   const dates = useDateWords();
@@ -34,10 +38,16 @@ export function PrintedSeason({ review }: { review: SeasonReview }) {
     ]),
     wide.map(({ length }) => length),
   );
+  const under = label === null ? t('underDraft', { place }) : t('under', { place, label });
+  const heads = {
+    running: t('sheet.running', { title: t('title', { year }), under }),
+    number: t('sheet.page', { page: PAGE, pages: PAGES }),
+  };
   return (
     <section className="season-sheet" style={{ '--season-letters': `${letterPt}pt` } as CSSProperties}>
+      <style>{pageHeads(heads)}</style>
       <h1>{t('title', { year })}</h1>
-      <p>{label === null ? t('underDraft', { place }) : t('under', { place, label })}</p>
+      <p>{under}</p>
       {wide.map((line) => (
         <p key={line}>{line}</p>
       ))}
@@ -59,7 +69,7 @@ export function PrintedSeason({ review }: { review: SeasonReview }) {
         </thead>
         <tbody>
           {rows.map(({ entry, cells }) => (
-            <tr key={entry.entryId}>
+            <tr key={entry.entryId} data-long={cells.some(({ length }) => length > LONG_CELL) || undefined}>
               <th scope="row">
                 {entry.titleOfficer}{' '}
                 <span className="own-words" lang={villageLanguageTag}>

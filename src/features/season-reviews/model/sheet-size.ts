@@ -4,7 +4,7 @@ export type SheetLine = readonly number[];
 export interface SheetSize {
   /** Of the letters, in points. */
   letterPt: number;
-  /** False where even the smallest letters need a second page. */
+  /** False where even the smallest letters need a second page: then there are as many as it takes, in letters to read. */
   isOnePage: boolean;
 }
 
@@ -13,6 +13,8 @@ export const COLUMN_SHARES = [0.21, 0.14, 0.12, 0.23, 0.3] as const;
 const LARGEST_PT = 9.5;
 const SMALLEST_PT = 5;
 const STEP_PT = 0.25;
+/** Where one page is not enough, nothing is won by small letters. */
+const ON_MANY_PAGES_PT = 8;
 const MM_OF_PT = 25.4 / 72;
 /** A4 without its margins. */
 const PAGE_WIDTH_MM = 190;
@@ -26,14 +28,14 @@ const FRAME_LINES = 8;
 
 /**
  * The largest letters with which a year stands on one page of A4: a village with a dozen entries reads it at arm's length,
- * one with sixty still has it on one sheet.
+ * one with sixty still has it on one sheet, one with hundreds has a small book.
  * @param wide letters of each text that goes over the whole width
  */
 export function sheetSize(lines: readonly SheetLine[], wide: readonly number[]): SheetSize {
   for (let letterPt = LARGEST_PT; letterPt >= SMALLEST_PT; letterPt -= STEP_PT) {
     if (heightMm(lines, wide, letterPt) <= PAGE_HEIGHT_MM) return { letterPt, isOnePage: true };
   }
-  return { letterPt: SMALLEST_PT, isOnePage: false };
+  return { letterPt: ON_MANY_PAGES_PT, isOnePage: false };
 }
 
 function heightMm(lines: readonly SheetLine[], wide: readonly number[], letterPt: number): number {

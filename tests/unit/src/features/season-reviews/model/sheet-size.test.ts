@@ -21,8 +21,8 @@ describe('the size of letters of a printed year', () => {
     expect(year(14, [30, 22, 10, 60, 500]).letterPt).toBeLessThan(year(14).letterPt);
   });
 
-  it('says so where a page does not hold it in letters that can be read', () => {
-    expect(year(300)).toEqual({ letterPt: 5, isOnePage: false });
+  it('goes on over further pages in letters to read where one page does not hold it', () => {
+    expect(year(300)).toEqual({ letterPt: 8, isOnePage: false });
   });
 
   it('shares the whole width among its columns', () => {
