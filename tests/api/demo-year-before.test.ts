@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { seedDemoCalendar } from '#server/features/demo/demo-calendar.service.js';
 import type { Calendar } from '#shared/contracts/calendars.js';
+import type { ConsentLine } from '#shared/contracts/consents.js';
 import type { ReviewedEntry, SeasonReview, SeasonTask } from '#shared/contracts/season-reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
@@ -64,6 +65,13 @@ describe('the first village of the demo', () => {
       .body as Version;
     expect(version).toMatchObject({ state: 'published', label: '2026-2' });
     await staff.get(`/api/calendars/${before?.id ?? ''}/season-review`).expect(403);
+  });
+
+  it('asks again about the things of this year alone', async () => {
+    const steward = await api.signIn('steward');
+    const { items } = (await steward.get(`/api/communities/${steward.communityId}/consents`).expect(200))
+      .body as { items: ConsentLine[] };
+    expect(items.filter(({ isDue }) => isDue).map(({ title }) => title)).toEqual(['Seed-lending evening']);
   });
 
   it('is not made twice', async () => {
