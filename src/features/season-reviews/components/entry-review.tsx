@@ -61,7 +61,7 @@ function Opened({ review, entry, writing: { typesDays, decides } }: EntryReviewP
     <>
       <dl className="season-facts">
         <dt>{t('facts.planned')}</dt>
-        <dd>{words.planned(entry, year)}</dd>
+        <dd>{words.planned(entry, review)}</dd>
         {!maySayDays && (
           <>
             <dt>{t('facts.done')}</dt>

@@ -19,7 +19,7 @@ export function PrintedSeason({ review }: { review: SeasonReview }) {
   const rows = entries.map((entry) => ({
     entry,
     cells: [
-      words.planned(entry, year),
+      words.planned(entry, review),
       words.done(entry) ?? t('sheet.notYet'),
       [words.star(entry), ...words.signs(entry)].filter((each) => each !== null).join(' '),
       said(entry.lessons, entry.decisions),

@@ -1,6 +1,6 @@
 import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { Decision, ReviewedEntry } from '#shared/contracts/season-reviews.js';
+import type { Decision, ReviewedEntry, SeasonReview } from '#shared/contracts/season-reviews.js';
 import type { Phenomenon } from '#shared/sky/vocabulary.js';
 import { useDateWords } from '#src/lib/date-words.js';
 import { useEntryWords } from '#src/lib/entry-words.js';
@@ -9,7 +9,7 @@ const AT_DAWN: readonly Phenomenon[] = ['heliacal-rising', 'cosmical-setting'];
 
 /** What a line of the year says, in words: on the screen and on paper alike. */
 export interface SeasonWords {
-  planned: (entry: ReviewedEntry, year: number) => string;
+  planned: (entry: ReviewedEntry, review: Pick<SeasonReview, 'year' | 'label'>) => string;
   /** The days on which it was done, with who said so where `withVoice`; null where nobody wrote them down. */
   done: (entry: ReviewedEntry, withVoice?: boolean) => string | null;
   star: (entry: ReviewedEntry) => string | null;
@@ -23,11 +23,12 @@ export function useSeasonWords(): SeasonWords {
   const words = useEntryWords();
   return useMemo(
     () => ({
-      planned: (entry, year) => {
+      planned: (entry, { year, label }) => {
         const { window, counted } = entry.planned;
         if (window === null && counted?.basis === 'waiting') return t('planned.waiting');
         const days = words.window(entry, window, year);
-        return entry.isPublished ? days : t('planned.draftOnly', { days });
+        // Where nothing is published the head of the page says so once.
+        return entry.isPublished || label === null ? days : t('planned.draftOnly', { days });
       },
       done: ({ actual }, withVoice = false) => {
         if (actual === null) return null;
