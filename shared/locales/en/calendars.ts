@@ -182,6 +182,9 @@ export const texts = {
     warnings_other: '{{count}} things to look at',
     onlyWarned: 'With something to look at ({{count}})',
     noneWarned: 'Nothing is left to look at.',
+    onlyKind: 'Only entries of one kind',
+    everyKind: 'Every kind',
+    kindOf: '{{kind}} ({{count}})',
   },
 
   order: {

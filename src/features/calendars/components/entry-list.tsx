@@ -7,6 +7,7 @@ import { MoreOfThem } from '#src/lib/shown-part.js';
 import { Button } from '#src/ui/button.js';
 import { TextField } from '#src/ui/field.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
+import { kindsIn, ofKind } from '../model/kind-filter.js';
 import { FIRST_PART, foundBy, LIST_PART, partWith } from '../model/list-part.js';
 import type { Editor } from '../model/use-editor.js';
 import type { EntryActions } from '../model/use-entry-actions.js';
@@ -14,7 +15,11 @@ import { thingsToLookAt } from '../model/advice-of-all.js';
 import type { ShownEntry } from '../model/preview-dates.js';
 import { yearSpan } from '../model/year-span.js';
 import { EntryRow } from './entry-row.js';
+import { KindFilter, WarnedFilter } from './list-filters.js';
 import { OrderList } from './order-list.js';
+
+/** So many are looked through without a choice of kinds. */
+const FEW_ENTRIES = 7;
 
 /** The entries in their order; on a wide screen beside the form, on a phone the first view. */
 export function EntryList({ editor, actions }: { editor: Editor; actions: EntryActions }) {
@@ -25,10 +30,14 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
   const [isOnlyWarned, setIsOnlyWarned] = useState(false);
   const warningsOf = (entry: ShownEntry) => thingsToLookAt(entry, advice.get(entry.id));
   const warned = shown.filter((entry) => warningsOf(entry) > 0);
+  const kinds = useMemo(() => kindsIn(shown), [shown]);
+  const [wantedKind, setWantedKind] = useState<string | null>(null);
+  const onlyKind = kinds.some(({ key }) => key === wantedKind) ? wantedKind : null;
+  const ofThisKind = ofKind(shown, onlyKind, selected?.id ?? null);
   // The open one stays, so that its last warning does not take it away under somebody's hands.
   const listed = isOnlyWarned
-    ? shown.filter((entry) => warningsOf(entry) > 0 || entry.id === selected?.id)
-    : shown;
+    ? ofThisKind.filter((entry) => warningsOf(entry) > 0 || entry.id === selected?.id)
+    : ofThisKind;
   const { isWide } = selection;
   const span = useMemo(() => yearSpan(calendar.year), [calendar.year]);
   const list = useOpenRowInSight(selected?.id ?? null);
@@ -44,15 +53,29 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
   const left = found.length - part.to;
   return (
     <section aria-label={t('editor.list')}>
-      {!isOrdering && (warned.length > 0 || isOnlyWarned) && (
-        <WarnedFilter
-          count={warned.length}
-          isOn={isOnlyWarned}
-          onChange={(isOn) => {
-            setIsOnlyWarned(isOn);
-            setDrawn(FIRST_PART);
-          }}
-        />
+      {!isOrdering && (
+        <div className="mb-3 grid gap-3 empty:hidden">
+          {(warned.length > 0 || isOnlyWarned) && (
+            <WarnedFilter
+              count={warned.length}
+              isOn={isOnlyWarned}
+              onChange={(isOn) => {
+                setIsOnlyWarned(isOn);
+                setDrawn(FIRST_PART);
+              }}
+            />
+          )}
+          {kinds.length > 1 && shown.length > FEW_ENTRIES && (
+            <KindFilter
+              kinds={kinds}
+              chosen={onlyKind}
+              onChange={(key) => {
+                setWantedKind(key);
+                setDrawn(FIRST_PART);
+              }}
+            />
+          )}
+        </div>
       )}
       {!isOrdering && shown.length > LIST_PART && (
         <div className="mb-3">
@@ -136,35 +159,6 @@ export function EntryList({ editor, actions }: { editor: Editor; actions: EntryA
         </div>
       )}
     </section>
-  );
-}
-
-interface WarnedFilterProps {
-  count: number;
-  isOn: boolean;
-  onChange: (isOn: boolean) => void;
-}
-
-/** Shows only those entries in which there is something to look at, and says of how many it is. */
-function WarnedFilter({ count, isOn, onChange }: WarnedFilterProps) {
-  const { t } = useTranslation('calendars');
-  return (
-    <div className="mb-3">
-      <button
-        type="button"
-        className="pick"
-        aria-pressed={isOn}
-        onClick={() => {
-          onChange(!isOn);
-        }}
-      >
-        <span className="ring" aria-hidden />
-        <span>{t('row.onlyWarned', { count })}</span>
-      </button>
-      <p className="text-small text-umber-soft" role="status">
-        {isOn && count === 0 && t('row.noneWarned')}
-      </p>
-    </div>
   );
 }
 
