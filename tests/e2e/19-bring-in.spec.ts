@@ -120,7 +120,7 @@ test('the officer opens a page for everybody, a passer-by reads it, and it is cl
   await expectNoSidewaysScroll(page);
 
   await expect(board.getByText('Nobody was asked about these:')).toBeVisible();
-  await expect(board.getByRole('link', { name: 'Ask about “Sow long millet”' })).toBeVisible();
+  await expect(board.getByRole('link', { name: 'Ask about “Sow short millet”' })).toBeVisible();
 
   const passing = await browser.newContext({ viewport: { width: 320, height: 740 } });
   const passerBy = await passing.newPage();
