@@ -24,7 +24,14 @@ export interface ImportWords {
 export type DayOrder = 'day-first' | 'month-first' | null;
 
 export type ImportDateProblem =
-  'date-not-read' | 'no-such-day' | 'other-year' | 'which-first' | ImportSignProblem;
+  | 'date-not-read'
+  | 'no-such-day'
+  | 'no-such-month'
+  | 'no-such-ten-days'
+  | 'day-or-ten-days'
+  | 'other-year'
+  | 'which-first'
+  | ImportSignProblem;
 
 /** What one cell says. A ten-day part has a first and a last day; every other day is both. */
 export type DateCell =
@@ -60,14 +67,14 @@ const OFFSET_APART = /^(.*\S)\s+([+\-−])\s*(\d{1,3})$/u;
 const SIGN_WORDS_MAX = 300;
 const TEN_DAY_NAMES: readonly string[] = ['first', 'second', 'third'];
 const TEN_DAY_PARTS = TEN_DAY_NAMES.length;
-const TEN_DAY_PARTS_OF_YEAR = 36;
-const ONLY_SLASH_MONTHS = 12;
+const MONTHS = 12;
+const TEN_DAY_PARTS_OF_YEAR = TEN_DAY_PARTS * MONTHS;
 
 /**
  * Reads one cell of a table as a day: `2027-06-14`, `06-14`, `14.6.`, `14/6`, `14 June`, `June 14`; as a ten-day part,
- * `June 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign, `Pleiades first morning +7`, `Belt due
- * south at 21:00`, `actual date of A04 +19`, `7 days before June solstice`. A month's name with 1, 2 or 3 behind it is always a ten-day part; the second
- * of June is `2 June`.
+ * `second ten days of June` or `June dekad 2` for 11 to 20 June or `D17` of the year's 36; or as days from a sign,
+ * `Pleiades first morning +7`, `Belt due south at 21:00`, `actual date of A04 +19`, `7 days before June solstice`. A month's
+ * name with nothing but 1, 2 or 3 behind it can be a day or ten days, and is asked about.
  *
  * @returns what the cell says, or what is the matter with it; never throws
  */
@@ -122,9 +129,9 @@ function dayCell(
   const month = monthFirst ? monthOf(monthFirst[1] ?? '') : 0;
   if (monthFirst && month > 0) {
     const number = Number(monthFirst[2]);
-    if (number > TEN_DAY_PARTS || monthFirst[3] !== undefined)
-      return day(month, monthFirst[2] ?? '', monthFirst[3]);
-    return tenDayPart((month - 1) * TEN_DAY_PARTS + number);
+    const canBePart = number >= 1 && number <= TEN_DAY_PARTS && monthFirst[3] === undefined;
+    if (canBePart) return { kind: 'problem', problem: 'day-or-ten-days' };
+    return day(month, monthFirst[2] ?? '', monthFirst[3]);
   }
   const said = saidBy(words, days);
   const monthSaid = said === null ? 0 : monthOf(plainWords(said.holes.month ?? '').replace(/\.$/u, ''));
@@ -142,8 +149,8 @@ function slashedDay(
   dayOrder: DayOrder,
   day: (month: string, dayOfMonth: string, year?: string) => DateCell,
 ): DateCell {
-  if (Number(first) > ONLY_SLASH_MONTHS) return day(second, first, year);
-  if (Number(second) > ONLY_SLASH_MONTHS) return day(first, second, year);
+  if (Number(first) > MONTHS) return day(second, first, year);
+  if (Number(second) > MONTHS) return day(first, second, year);
   // The same number twice is the same day both ways.
   if (Number(first) === Number(second)) return day(first, second, year);
   if (dayOrder === null) return { kind: 'problem', problem: 'which-first' };
@@ -154,15 +161,15 @@ function oneDay(month: number, day: number, year: number | null, calendarYear: n
   if (year !== null && year !== calendarYear && year !== calendarYear + 1) {
     return { kind: 'problem', problem: 'other-year' };
   }
+  if (month < 1 || month > MONTHS) return { kind: 'problem', problem: 'no-such-month' };
   // A day of every year has no 29 February.
-  const exists = month >= 1 && month <= 12 && day >= 1 && day <= daysInMonth(1, month);
-  if (!exists) return { kind: 'problem', problem: 'no-such-day' };
+  if (day < 1 || day > daysInMonth(1, month)) return { kind: 'problem', problem: 'no-such-day' };
   return { kind: 'day', first: { month, day }, last: { month, day }, year };
 }
 
 /** Three to a month: 1–10, 11–20 and the rest of it. */
 function tenDayPart(number: number): DateCell {
-  if (number < 1 || number > TEN_DAY_PARTS_OF_YEAR) return { kind: 'problem', problem: 'no-such-day' };
+  if (number < 1 || number > TEN_DAY_PARTS_OF_YEAR) return { kind: 'problem', problem: 'no-such-ten-days' };
   const month = Math.ceil(number / TEN_DAY_PARTS);
   const part = (number - 1) % TEN_DAY_PARTS;
   const lastDay = part === TEN_DAY_PARTS - 1 ? daysInMonth(1, month) : (part + 1) * 10;

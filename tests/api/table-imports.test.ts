@@ -63,7 +63,7 @@ describe('a table', () => {
     const lines = [
       line(SOW, 2),
       line({ titleOfficer: 'Mend', kind: 'farming', bestFrom: '6/7' }, 4),
-      line({ kind: 'magic', bestFrom: '31.4.', bestTo: 'June 2' }, 5),
+      line({ kind: 'magic', bestFrom: '31.4.', bestTo: 'May 2' }, 5),
     ];
     const read = await sent(calendarId, input(lines, { dryRun: true }));
     expect(read.added).toBe(1);
@@ -75,6 +75,7 @@ describe('a table', () => {
         '',
         [
           { column: 'bestFrom', code: 'no-such-day' },
+          { column: 'bestTo', code: 'day-or-ten-days' },
           { column: 'kind', code: 'unknown-kind' },
           { column: 'titleOfficer', code: 'required' },
         ],

@@ -202,11 +202,15 @@ describe('a table of another hand', () => {
         basis: 'tradition',
       },
       ...{
-        signs: 'Bird | weaver | | | 20 May | June 1\nsoil|wet',
+        signs: 'Bird | weaver | | | 20 May | June dekad 1\nsoil|wet',
         mustHaveSign: 'WET',
         heardDay: '3 March 2025',
       },
-      ...{ checkedSafety: 'R. Ansel | Office | 3.3.2026', stopDate: 'July 1', stopSource: 'Office' },
+      ...{
+        checkedSafety: 'R. Ansel | Office | 3.3.2026',
+        stopDate: 'first ten days of July',
+        stopSource: 'Office',
+      },
     };
     await send(calendarId, [{ line: 2, cells: { ...SOW, ...cells } }]);
     const [entry] = await entriesOf(village.officer, calendarId);
@@ -239,6 +243,8 @@ describe('a table of another hand', () => {
     [{ signs: 'dragon | weaver' }, 'signs unknown-sign-kind'],
     [{ signs: 'bird | weaver | | | 20 May' }, 'signs sign-parts'],
     [{ signs: 'bird | weaver | | | 31.4. | 1.5.' }, 'signs no-such-day'],
+    [{ signs: 'bird | weaver | | | 20 May | June 1' }, 'signs day-or-ten-days'],
+    [{ stopDate: 'July 1', stopSource: 'Office' }, 'stopDate day-or-ten-days'],
     [{ signs: 'bird | weaver | | | | | perhaps' }, 'signs unknown-still-seen'],
     [{ signs: 'bird | weaver', signsNeeded: '2' }, 'signsNeeded signs-needed'],
     [{ signs: 'bird | weaver', mustHaveSign: '2' }, 'mustHaveSign which-sign'],

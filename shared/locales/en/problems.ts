@@ -258,9 +258,13 @@ export const texts = {
     'depth-range': 'Write how deep the Sun must be, between 4 and 25 degrees.',
     'consent-clip-first': 'Record first that the speaker agrees; then the recording itself.',
     'date-not-read':
-      'This is not read as a day. Write it as 2027-06-14, 14.6., 14 June, June 2 (a ten-day part) or Pleiades first morning +7.',
+      'This is not read as a day. Write it as 2027-06-14, 14.6., 14 June, second ten days of June or Pleiades first morning +7.',
     'other-year':
       'This day is of another year than the calendar. Take the year away, or bring it into that year’s calendar.',
+    'no-such-month': 'There is no such month: months count from 1 to 12.',
+    'no-such-ten-days': 'There are no such ten days: a year has D1 to D36, three to a month.',
+    'day-or-ten-days':
+      'This can be one day or ten: “May 1” is 1 May, or 1 to 10 May. For the day write “1 May” or “2027-05-01”, for the ten days “first ten days of May” or “May dekad 1”.',
     'which-first': 'Say above whether the day or the month comes first in days such as 6/7.',
     'unknown-star-name':
       'The village knows no star or figure of this name. Use its name from the list of stars.',

@@ -16,11 +16,14 @@ export const texts = {
     fixedDate: 'fixed date, fixed day, on',
     /** Other ways to write a day, and the three parts of ten days of a month. */
     days: {
-      day: '{{day}} of {{month}} | {{day}} of {{month}} {{year}} | {{day}}st {{month}} | {{day}}nd {{month}} | {{day}}rd {{month}} | {{day}}th {{month}}',
+      day: '{{day}} of {{month}} | {{day}} of {{month}} {{year}} | {{day}}st {{month}} | {{day}}nd {{month}} | {{day}}rd {{month}} | {{day}}th {{month}} | {{day}}st of {{month}} | {{day}}nd of {{month}} | {{day}}rd of {{month}} | {{day}}th of {{month}} | {{month}} {{day}}st | {{month}} {{day}}nd | {{month}} {{day}}rd | {{month}} {{day}}th',
       tenDays: {
-        first: 'early {{month}} | first ten days of {{month}}',
-        second: 'mid {{month}} | middle of {{month}} | second ten days of {{month}}',
-        third: 'late {{month}} | last ten days of {{month}}',
+        first:
+          'early {{month}} | first ten days of {{month}} | 1st ten days of {{month}} | first dekad of {{month}} | 1st dekad of {{month}} | dekad 1 of {{month}} | {{month}} dekad 1',
+        second:
+          'mid {{month}} | middle of {{month}} | second ten days of {{month}} | 2nd ten days of {{month}} | second dekad of {{month}} | 2nd dekad of {{month}} | dekad 2 of {{month}} | {{month}} dekad 2',
+        third:
+          'late {{month}} | last ten days of {{month}} | third ten days of {{month}} | 3rd ten days of {{month}} | third dekad of {{month}} | 3rd dekad of {{month}} | last dekad of {{month}} | dekad 3 of {{month}} | {{month}} dekad 3',
       },
     },
     /** Days before and after a sign. */
@@ -252,7 +255,7 @@ export const texts = {
         titleOfficer: 'Example: close the store',
         kind: 'household',
         bestFrom: '20 November',
-        bestTo: 'early December',
+        bestTo: 'first ten days of December',
       },
     },
   },

@@ -18,11 +18,11 @@ export const texts = {
       day: '{{day}} de {{month}} | {{day}} de {{month}} de {{year}} | {{day}} de {{month}} del {{year}} | {{day}} de {{month}} {{year}} | {{day}}º de {{month}} | {{day}}.º de {{month}} | el {{day}} de {{month}}',
       tenDays: {
         first:
-          'principios de {{month}} | a principios de {{month}} | primera década de {{month}} | primeros diez días de {{month}}',
+          'principios de {{month}} | a principios de {{month}} | primera década de {{month}} | primeros diez días de {{month}} | 1.ª década de {{month}} | 1ª década de {{month}} | década 1 de {{month}} | {{month}} década 1',
         second:
-          'mediados de {{month}} | a mediados de {{month}} | segunda década de {{month}} | segundos diez días de {{month}}',
+          'mediados de {{month}} | a mediados de {{month}} | segunda década de {{month}} | segundos diez días de {{month}} | 2.ª década de {{month}} | 2ª década de {{month}} | década 2 de {{month}} | {{month}} década 2',
         third:
-          'finales de {{month}} | a finales de {{month}} | fines de {{month}} | tercera década de {{month}} | últimos diez días de {{month}}',
+          'finales de {{month}} | a finales de {{month}} | fines de {{month}} | tercera década de {{month}} | últimos diez días de {{month}} | 3.ª década de {{month}} | 3ª década de {{month}} | década 3 de {{month}} | {{month}} década 3',
       },
     },
     offsets: {
@@ -273,7 +273,7 @@ export const texts = {
         titleOfficer: 'Ejemplo: cerrar el granero',
         kind: 'casa',
         bestFrom: '20 de noviembre',
-        bestTo: 'principios de diciembre',
+        bestTo: 'primeros diez días de diciembre',
       },
     },
   },

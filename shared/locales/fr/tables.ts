@@ -18,11 +18,11 @@ export const texts = {
       day: '{{day}}er {{month}} | {{day}}er {{month}} {{year}} | le {{day}} {{month}} | le {{day}}er {{month}} | le {{day}} {{month}} {{year}}',
       tenDays: {
         first:
-          'début {{month}} | début de {{month}} | première décade de {{month}} | dix premiers jours de {{month}} | première décade d’{{month}} | début d’{{month}}',
+          'début {{month}} | début de {{month}} | première décade de {{month}} | dix premiers jours de {{month}} | première décade d’{{month}} | début d’{{month}} | dix premiers jours d’{{month}} | 1re décade de {{month}} | 1re décade d’{{month}} | décade 1 de {{month}} | décade 1 d’{{month}} | {{month}} décade 1 | 1ère décade de {{month}} | 1ère décade d’{{month}}',
         second:
-          'mi-{{month}} | mi {{month}} | milieu de {{month}} | deuxième décade de {{month}} | deuxième décade d’{{month}}',
+          'mi-{{month}} | mi {{month}} | milieu de {{month}} | deuxième décade de {{month}} | deuxième décade d’{{month}} | 2e décade de {{month}} | 2e décade d’{{month}} | décade 2 de {{month}} | décade 2 d’{{month}} | {{month}} décade 2',
         third:
-          'fin {{month}} | fin de {{month}} | troisième décade de {{month}} | dix derniers jours de {{month}} | troisième décade d’{{month}} | fin d’{{month}}',
+          'fin {{month}} | fin de {{month}} | troisième décade de {{month}} | dix derniers jours de {{month}} | troisième décade d’{{month}} | fin d’{{month}} | dix derniers jours d’{{month}} | 3e décade de {{month}} | 3e décade d’{{month}} | décade 3 de {{month}} | décade 3 d’{{month}} | {{month}} décade 3',
       },
     },
     offsets: {
@@ -271,7 +271,7 @@ export const texts = {
         titleOfficer: 'Exemple : fermer le grenier',
         kind: 'maison',
         bestFrom: '20 novembre',
-        bestTo: 'début décembre',
+        bestTo: 'première décade de décembre',
       },
     },
   },

@@ -19,11 +19,11 @@ export const texts = {
       day: '{{day}} de {{month}} | {{day}} de {{month}} de {{year}} | {{day}}º de {{month}} | {{day}}.º de {{month}} | dia {{day}} de {{month}}',
       tenDays: {
         first:
-          'início de {{month}} | no início de {{month}} | começo de {{month}} | primeira dezena de {{month}} | primeiros dez dias de {{month}}',
+          'início de {{month}} | no início de {{month}} | começo de {{month}} | primeira dezena de {{month}} | primeiros dez dias de {{month}} | 1.ª dezena de {{month}} | 1ª dezena de {{month}} | primeira década de {{month}} | dezena 1 de {{month}} | {{month}} dezena 1 | {{month}} década 1',
         second:
-          'meados de {{month}} | em meados de {{month}} | segunda dezena de {{month}} | segundos dez dias de {{month}}',
+          'meados de {{month}} | em meados de {{month}} | segunda dezena de {{month}} | segundos dez dias de {{month}} | 2.ª dezena de {{month}} | 2ª dezena de {{month}} | segunda década de {{month}} | dezena 2 de {{month}} | {{month}} dezena 2 | {{month}} década 2',
         third:
-          'fim de {{month}} | no fim de {{month}} | final de {{month}} | finais de {{month}} | terceira dezena de {{month}} | últimos dez dias de {{month}}',
+          'fim de {{month}} | no fim de {{month}} | final de {{month}} | finais de {{month}} | terceira dezena de {{month}} | últimos dez dias de {{month}} | 3.ª dezena de {{month}} | 3ª dezena de {{month}} | terceira década de {{month}} | dezena 3 de {{month}} | {{month}} dezena 3 | {{month}} década 3',
       },
     },
     offsets: {
@@ -270,7 +270,7 @@ export const texts = {
         titleOfficer: 'Exemplo: fechar o celeiro',
         kind: 'casa',
         bestFrom: '20 de novembro',
-        bestTo: 'início de dezembro',
+        bestTo: 'primeiros dez dias de dezembro',
       },
     },
   },

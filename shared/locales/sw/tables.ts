@@ -17,9 +17,12 @@ export const texts = {
     days: {
       day: 'tarehe {{day}} {{month}} | tarehe {{day}} {{month}} {{year}} | tarehe {{day}} ya {{month}} | {{day}} ya {{month}} | tarehe {{day}} mwezi wa {{month}}',
       tenDays: {
-        first: 'mwanzo wa {{month}} | mwanzoni mwa {{month}} | siku kumi za kwanza za {{month}}',
-        second: 'katikati ya {{month}} | siku kumi za pili za {{month}}',
-        third: 'mwisho wa {{month}} | mwishoni mwa {{month}} | siku kumi za mwisho za {{month}}',
+        first:
+          'mwanzo wa {{month}} | mwanzoni mwa {{month}} | siku kumi za kwanza za {{month}} | siku kumi za 1 za {{month}} | dekadi ya kwanza ya {{month}} | dekadi ya 1 ya {{month}} | {{month}} dekadi 1 | {{month}} dekadi ya 1',
+        second:
+          'katikati ya {{month}} | siku kumi za pili za {{month}} | siku kumi za 2 za {{month}} | dekadi ya pili ya {{month}} | dekadi ya 2 ya {{month}} | {{month}} dekadi 2 | {{month}} dekadi ya 2',
+        third:
+          'mwisho wa {{month}} | mwishoni mwa {{month}} | siku kumi za mwisho za {{month}} | siku kumi za tatu za {{month}} | siku kumi za 3 za {{month}} | dekadi ya tatu ya {{month}} | dekadi ya 3 ya {{month}} | {{month}} dekadi 3 | {{month}} dekadi ya 3',
       },
     },
     offsets: {
@@ -251,7 +254,7 @@ export const texts = {
         titleOfficer: 'Mfano: kufunga ghala',
         kind: 'nyumba',
         bestFrom: '20 Novemba',
-        bestTo: 'mwanzo wa Desemba',
+        bestTo: 'siku kumi za kwanza za Desemba',
       },
     },
   },

@@ -50,13 +50,30 @@ describe('a cell that says when', () => {
   });
 
   it.each([
-    ['June 1', day(6, 1, 10)],
-    ['June 2', day(6, 11, 20)],
-    ['Feb 3', day(2, 21, 28)],
+    ['first ten days of June', day(6, 1, 10)],
+    ['1st ten days of June', day(6, 1, 10)],
+    ['1st dekad of June', day(6, 1, 10)],
+    ['June dekad 2', day(6, 11, 20)],
+    ['Feb. dekad 3', day(2, 21, 28)],
+    ['last ten days of June', day(6, 21, 30)],
     ['D17', day(6, 11, 20)],
     ['D36', day(12, 21, 31)],
-    ['D37', problem('no-such-day')],
+    ['D37', problem('no-such-ten-days')],
   ])('reads %j as a ten-day part', (text, expected) => {
+    expect(read(text)).toEqual(expected);
+  });
+
+  it.each([
+    ['June 01, 2027', day(6, 1, 1, 2027)],
+    ['June 1st', day(6, 1)],
+    ['1st of June', day(6, 1)],
+    ['June 4', day(6, 4)],
+    ['June 0', problem('no-such-day')],
+    ['May 1', problem('day-or-ten-days')],
+    ['May 2', problem('day-or-ten-days')],
+    ['Dec. 3', problem('day-or-ten-days')],
+    ['Fixed date: May 1', problem('day-or-ten-days')],
+  ])('takes %j for one day only where it can be nothing else', (text, expected) => {
     expect(read(text)).toEqual(expected);
   });
 
@@ -73,8 +90,11 @@ describe('a cell that says when', () => {
   });
 
   it('knows no day that is not in every year', () => {
-    for (const text of ['02-29', '31.4.', '13-01', '0 June', '2027-00-10']) {
+    for (const text of ['02-29', '31.4.', '0 June', '2027-05-45']) {
       expect(read(text)).toEqual(problem('no-such-day'));
+    }
+    for (const text of ['13-01', '2027-00-10', '2027-13-45', '14/15']) {
+      expect(read(text)).toEqual(problem('no-such-month'));
     }
   });
 

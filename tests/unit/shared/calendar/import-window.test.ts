@@ -61,7 +61,7 @@ describe('the days of a line', () => {
       ...{ problems: [], lead: { type: 'day', date: { month: 12, day: 28 } } },
       offsets: offsets(-8, 0, 8, 13),
     });
-    expect(line({ bestFrom: 'June 2' })).toMatchObject({ offsets: offsets(0, 0, 9, 9) });
+    expect(line({ bestFrom: 'June dekad 2' })).toMatchObject({ offsets: offsets(0, 0, 9, 9) });
     expect(line({ when: '07-05', bestFrom: '07-03', bestTo: '07-05' })).toMatchObject({
       ...{ lead: { date: { month: 7, day: 5 } }, offsets: offsets(-2, -2, 0, 0) },
     });

@@ -115,6 +115,32 @@ describe('words of all languages together', () => {
   });
 });
 
+describe('a month with 1, 2 or 3 behind it', () => {
+  const days = (text: string) => {
+    const cell = dateCell(text, facts);
+    return cell.kind === 'day' ? [cell.first, cell.last] : cell;
+  };
+
+  it.each(TABLE_LANGUAGES)('is asked about in %s, and has ways to say the ten days', (language) => {
+    const { months, days: said } = tableTexts[language].words;
+    for (const [index, names] of months.split('|').entries()) {
+      const [name = ''] = names.split(',').map((each) => each.trim());
+      for (const [at, part] of (['first', 'second', 'third'] as const).entries()) {
+        const number = at + 1;
+        expect(days(`${name} ${String(number)}`)).toEqual({ kind: 'problem', problem: 'day-or-ten-days' });
+        const ways = said.tenDays[part].split('|').map((way) => way.trim().replace('{{month}}', name));
+        expect(ways.filter((way) => way.includes(String(number))).length).toBeGreaterThan(1);
+        for (const way of ways) {
+          expect(days(way), way).toMatchObject([
+            { month: index + 1, day: at * 10 + 1 },
+            { month: index + 1 },
+          ]);
+        }
+      }
+    }
+  });
+});
+
 describe('a day in words', () => {
   const day = (month: number, first: number, last = first, year: number | null = null) => ({
     ...{ kind: 'day', year, first: { month, day: first }, last: { month, day: last } },
@@ -123,18 +149,25 @@ describe('a day in words', () => {
     ['14 de junio', day(6, 14)],
     ['14 de junio de 2027', day(6, 14, 14, 2027)],
     ['1.º de septiembre', day(9, 1)],
-    ['junio 2', day(6, 11, 20)],
+    ['junio década 2', day(6, 11, 20)],
+    ['1.ª década de mayo', day(5, 1, 10)],
     ['mediados de Junio', day(6, 11, 20)],
     ['últimos diez días de febrero', day(2, 21, 28)],
     ['1er août', day(8, 1)],
     ["première décade d'août", day(8, 1, 10)],
     ['mi-juin', day(6, 11, 20)],
+    ["1ere decade d'avril", day(4, 1, 10)],
+    ['mai décade 3', day(5, 21, 31)],
     ['fin févr.', day(2, 21, 28)],
     ['5 de março de 2028', day(3, 5, 5, 2028)],
     ['meados de setembro', day(9, 11, 20)],
+    ['1.ª dezena de março', day(3, 1, 10)],
+    ['março dezena 1', day(3, 1, 10)],
     ['tarehe 14 Juni', day(6, 14)],
     ['mwishoni mwa Desemba', day(12, 21, 31)],
-    ['14th of June', { kind: 'problem', problem: 'unknown-sign-words' }],
+    ['Desemba dekadi 1', day(12, 1, 10)],
+    ['14th of June', day(6, 14)],
+    ['14th in June', { kind: 'problem', problem: 'unknown-sign-words' }],
     ['3rd June', day(6, 3)],
     ['late June', day(6, 21, 30)],
     ['31 de junio', { kind: 'problem', problem: 'no-such-day' }],
