@@ -1,3 +1,4 @@
+import { withSeen } from './as-seen.js';
 import { entryDatesFromDays, type AnchorDays } from './entry-dates.js';
 import type { EntryDates, EntryLead, EntryTiming, EntryWindow } from './entry-model.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
@@ -114,7 +115,6 @@ function anchorDaysOf(lead: EntryLead, window: EntryWindow | null, actual: Actua
 
 /** A lead as it goes into another year's draft: on the entries of that draft, and nothing seen yet. */
 export function leadForAnotherYear<L extends EntryLead>(lead: L, newIdOf: ReadonlyMap<string, string>): L {
-  if (lead.type === 'marker-as-seen') return { ...lead, seen: null };
-  if (lead.type !== 'entry-planned' && lead.type !== 'entry-actual') return lead;
+  if (lead.type !== 'entry-planned' && lead.type !== 'entry-actual') return withSeen(lead, null);
   return { ...lead, entryId: newIdOf.get(lead.entryId) ?? lead.entryId };
 }

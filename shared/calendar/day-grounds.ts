@@ -1,3 +1,4 @@
+import { withSeen } from './as-seen.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import type { DaySpell } from './entry-dates.js';
 import { isStarLead, type EntryTiming, type EntryWindow } from './entry-model.js';
@@ -129,7 +130,7 @@ function withFigures<P extends MovedPlace>(first: P, second: P, rest: P = first)
 }
 
 function unseen({ lead }: EntryTiming): unknown {
-  return lead.type === 'marker-as-seen' ? { ...lead, seen: null } : lead;
+  return withSeen(lead, null);
 }
 
 /** Where the date has its source from moves no day. */

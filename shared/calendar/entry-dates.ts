@@ -26,6 +26,7 @@ import type {
   OccurrenceDays,
   StarLead,
 } from './entry-model.js';
+import { seenOf } from './as-seen.js';
 import { ENTRY_WARNINGS } from './entry-model.js';
 import { windowOf, type WindowResult } from './window.js';
 
@@ -161,11 +162,11 @@ function leadOf({ lead }: EntryTiming, year: number, leadDays: LeadDays, anchor:
     case 'fixed-date':
       return withoutSky(oneDay(dayNumberOf(year, lead.date.month, lead.date.day)));
     case 'sky':
-      return skyLeadOf(lead, year, leadDays);
+      return asSeen(lead, skyLeadOf(lead, year, leadDays));
     case 'marker':
       return starLeadOf(lead, year, leadDays);
     case 'marker-as-seen':
-      return seenLeadOf(lead, year, leadDays);
+      return asSeen(lead, starLeadOf(lead, year, leadDays));
     case 'nature-sign': {
       const spell = spellIn(year, lead.usual);
       return { ...withoutSky(spell), counted: { basis: 'usual', spell, beside: null } };
@@ -192,14 +193,10 @@ function withoutSky(spell: DaySpell | null, warnings: EntryWarning[] = []): Lead
 }
 
 /** The computed day stays beside; doubts about whether there is one are settled once somebody has seen it. */
-function seenLeadOf(
-  lead: Extract<EntryLead, { type: 'marker-as-seen' }>,
-  year: number,
-  leadDays: LeadDays,
-): Lead {
-  const computed = starLeadOf(lead, year, leadDays);
-  if (lead.seen === null) return computed;
-  const spell = oneDay(dayNumberFromIso(lead.seen.date));
+function asSeen(lead: EntryLead, computed: Lead): Lead {
+  const seen = seenOf(lead);
+  if (seen === null) return computed;
+  const spell = oneDay(dayNumberFromIso(seen.date));
   const warnings = computed.warnings.filter((warning) =>
     (WARNED_NOTES as readonly string[]).includes(warning),
   );

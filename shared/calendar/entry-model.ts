@@ -20,8 +20,11 @@ export interface MonthDay {
 
 export type EntryLead =
   | { type: 'marker'; markerKey: string; phenomenon: Phenomenon; occurrence: 1 | 2 }
-  /** `occurrence` counts within the year: up to thirteen for Moons, two for the rest. */
-  | { type: 'sky'; spec: SkyMarkerSpec; occurrence: number }
+  /**
+   * `occurrence` counts within the year: up to thirteen for Moons, two for the rest. `seen` is left out where the computed
+   * day leads, and null until people have seen it where the day on which they do leads.
+   */
+  | { type: 'sky'; spec: SkyMarkerSpec; occurrence: number; seen?: SeenDay | null | undefined }
   | { type: 'fixed-date'; date: MonthDay; source: string }
   /** Counted from the computed day until people have seen it; from then on from the day on which they saw it. */
   | {

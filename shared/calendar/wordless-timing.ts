@@ -1,3 +1,4 @@
+import { seenOf, withSeen } from './as-seen.js';
 import type { EntryLead, EntryTiming } from './entry-model.js';
 
 /** On what an entry's days rest, without a word or a name that anybody gave: enough to reckon them anew. */
@@ -25,9 +26,9 @@ function wordlessLead(lead: EntryLead): EntryLead {
       return { ...lead, source: '' };
     case 'nature-sign':
       return { ...lead, name: '', source: '' };
-    case 'marker-as-seen':
-      return { ...lead, seen: lead.seen && { date: lead.seen.date, by: '', agreedBy: '' } };
-    default:
-      return lead;
+    default: {
+      const seen = seenOf(lead);
+      return withSeen(lead, seen && { date: seen.date, by: '', agreedBy: '' });
+    }
   }
 }

@@ -13,7 +13,7 @@ const signOccurrence = z
   .min(1, 'moon-count')
   .max(MOON_COUNT.max, 'moon-count');
 
-/** A star's day as people saw it this year: who saw it, and which elder agrees. */
+/** The day of a star or a sign as people saw it this year: who saw it, and which elder agrees. */
 export const seenDay = z.strictObject({
   date: z.iso.date('date-form'),
   by: line(120, 1),
@@ -27,8 +27,15 @@ export type PlannedDay = (typeof PLANNED_DAYS)[number];
 /** From what the days of an entry are counted. */
 export const entryLead = z.discriminatedUnion('type', [
   z.strictObject({ type: z.literal('marker'), markerKey, phenomenon, occurrence }),
-  /** A marker beyond a star's first and last days: Sun, nights, culminations. */
-  z.strictObject({ type: z.literal('sky'), spec: skyMarkerSpec, occurrence: signOccurrence }),
+  /**
+   * A marker beyond a star's first and last days: Sun, Moon, nights, culminations. `seen` is left out where its computed day
+   * leads; null until people have seen it, where the day on which they do leads.
+   */
+  z.strictObject({
+    type: z.literal('sky'),
+    ...{ spec: skyMarkerSpec, occurrence: signOccurrence },
+    seen: seenDay.nullable().optional(),
+  }),
   z.strictObject({ type: z.literal('fixed-date'), date: monthDay, source: line(200, 1) }),
   /** The computed day until the star was seen, then the day on which it was. */
   z.strictObject({

@@ -1,3 +1,4 @@
+import { goesAsSeen } from '#shared/calendar/as-seen.js';
 import { useCallback, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
@@ -55,6 +56,10 @@ export function useEntryWords(): EntryWords {
       }
       if (lead.type === 'sky') {
         const name = sign(lead.spec, markers);
+        if (goesAsSeen(lead)) {
+          const which = lead.spec.kind === 'moon-phase' ? 'moonSeen' : 'signSeen';
+          return t(`anchors:${group}.${which}`, { sign: name, nth: lead.occurrence });
+        }
         // Moons are numbered from the first of the year on; of the rest only the second needs a word.
         if (lead.spec.kind === 'moon-phase')
           return t(`${group}.skyNth`, { sign: name, nth: lead.occurrence });

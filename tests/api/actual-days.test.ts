@@ -211,6 +211,27 @@ describe('the page of the day', () => {
   });
 });
 
+describe('the first crescent as seen this year', () => {
+  it('is counted from its evening, and is taken from no day that has not come', async () => {
+    api.clock.set(new Date('2027-02-10T06:00:00Z'));
+    const officer = await api.signIn('officer');
+    const spec = { kind: 'moon-phase', event: 'first-crescent' } as const;
+    const lead = { type: 'sky', spec, occurrence: 2 } as const;
+    const computed = await addEntry(officer, calendar.id, { lead });
+    const seen = { date: '2027-02-09', by: 'Tirel', agreedBy: 'Elder A-1' };
+    const entry = await addEntry(officer, calendar.id, { lead: { ...lead, seen } });
+    expect(entry.dates.counted).toMatchObject({ basis: 'seen', beside: computed.dates.window });
+    expect(entry.dates.window?.bestFrom).toBe('2027-02-16');
+    const early = await officer.post(
+      `/api/calendars/${calendar.id}/entries`,
+      entryInput({ lead: { ...lead, seen: { ...seen, date: '2028-01-30' } } }),
+    );
+    expect((early.body as Problem).errors).toMatchObject([
+      { field: 'lead.seen.date', code: 'in-the-future' },
+    ]);
+  });
+});
+
 describe('a star as seen this year', () => {
   it('is counted from the day on which it was seen, with the computed days beside', async () => {
     let { officer } = village;

@@ -1,3 +1,4 @@
+import { seenOf } from '#shared/calendar/as-seen.js';
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import type { EntityManager } from 'typeorm';
@@ -42,11 +43,12 @@ export function expectSeenInYear(
   { year, today }: { year: number; today: string },
   field: string,
 ): void {
-  if (lead.type !== 'marker-as-seen' || lead.seen === null) return;
-  if (Math.abs(Number(lead.seen.date.slice(0, 4)) - year) > 1) {
+  const seen = seenOf(lead);
+  if (seen === null) return;
+  if (Math.abs(Number(seen.date.slice(0, 4)) - year) > 1) {
     throw invalidField(`${field}.seen.date`, 'not-of-this-year');
   }
-  if (lead.seen.date > today) throw invalidField(`${field}.seen.date`, 'in-the-future');
+  if (seen.date > today) throw invalidField(`${field}.seen.date`, 'in-the-future');
 }
 
 /** Names of the fields that differ; what stands in them stays out of the record. */

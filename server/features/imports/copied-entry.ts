@@ -1,3 +1,4 @@
+import { seenOf, withSeen } from '#shared/calendar/as-seen.js';
 import { anchorOf } from '#shared/calendar/anchors.js';
 import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import { EMPTY_RECORD, type EventRecord } from '#shared/contracts/event-record.js';
@@ -74,20 +75,15 @@ function leadElsewhere(
   if (figure !== undefined) {
     if (figure.indicatorHr === null) return { lead: null, note: 'figure-left-out' };
     const markerKey = `hr${String(figure.indicatorHr)}`;
-    return { lead: unseen(ledBy(lead, markerKey)), note: 'star-instead-of-figure' };
+    return { lead: withSeen(ledBy(lead, markerKey), null), note: 'star-instead-of-figure' };
   }
-  const isSeen = lead.type === 'marker-as-seen' && lead.seen !== null;
-  return { lead: unseen(lead), note: isSeen ? 'seen-dropped' : null };
+  return { lead: withSeen(lead, null), note: seenOf(lead) === null ? null : 'seen-dropped' };
 }
 
 function ledBy(lead: EntryLead, markerKey: string): EntryLead {
   if (lead.type === 'marker' || lead.type === 'marker-as-seen') return { ...lead, markerKey };
   if (lead.type === 'sky' && 'markerKey' in lead.spec) return { ...lead, spec: { ...lead.spec, markerKey } };
   return lead;
-}
-
-function unseen(lead: EntryLead): EntryLead {
-  return lead.type === 'marker-as-seen' ? { ...lead, seen: null } : lead;
 }
 
 /**

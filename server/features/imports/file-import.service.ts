@@ -1,3 +1,4 @@
+import { seenOf, withSeen } from '#shared/calendar/as-seen.js';
 import type { CalendarFileSeason, ReadableCalendarFile } from '#shared/contracts/calendar-file.js';
 import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
@@ -184,10 +185,10 @@ function sharedAsToday({ sharing, ...content }: EntryInput, { level, details }: 
   return { ...content, sharingLevel: level, ...(isPlain ? {} : { sharing: details }) };
 }
 
-/** A star that was seen in another year was not seen in this one. */
+/** What was seen in another year was not seen in this one. */
 function inYear(content: EntryInput, year: number): EntryInput {
-  const { lead } = content;
-  if (lead.type !== 'marker-as-seen' || lead.seen === null) return content;
-  const isNear = Math.abs(Number(lead.seen.date.slice(0, 4)) - year) <= 1;
-  return isNear ? content : { ...content, lead: { ...lead, seen: null } };
+  const seen = seenOf(content.lead);
+  if (seen === null) return content;
+  const isNear = Math.abs(Number(seen.date.slice(0, 4)) - year) <= 1;
+  return isNear ? content : { ...content, lead: withSeen(content.lead, null) };
 }

@@ -1,3 +1,4 @@
+import { goesAsSeen } from '#shared/calendar/as-seen.js';
 import { leadForAnotherYear } from '#shared/calendar/anchors.js';
 import type { EntryTiming } from '#shared/calendar/entry-model.js';
 import { wordlessTiming } from '#shared/calendar/wordless-timing.js';
@@ -66,6 +67,6 @@ function nextYears(content: EntryInput, newIdOf: ReadonlyMap<string, string>): E
 /** On what the days of the old year rest, told by the things of the new draft. */
 function timingBefore(content: EntryInput, newIdOf: ReadonlyMap<string, string>): EntryTiming {
   const { lead } = content;
-  const known = lead.type === 'marker-as-seen' ? lead : leadForAnotherYear(lead, newIdOf);
+  const known = goesAsSeen(lead) ? lead : leadForAnotherYear(lead, newIdOf);
   return wordlessTiming({ ...content, lead: known });
 }

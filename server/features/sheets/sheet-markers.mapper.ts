@@ -55,9 +55,10 @@ export function toSheetMarkers(
     }));
 }
 
-/** A star as computed and as seen is one mark, by its computed day. */
+/** What leads as computed and as seen is one mark, by its computed day. */
 function markKeyOf(lead: SkyLed): string {
-  if (lead.type === 'sky') return canonicalJson(lead);
+  if (lead.type === 'sky')
+    return canonicalJson({ type: 'sky', spec: lead.spec, occurrence: lead.occurrence });
   const { markerKey, phenomenon, occurrence } = lead;
   return canonicalJson({ type: 'marker', markerKey, phenomenon, occurrence });
 }

@@ -23,12 +23,16 @@ export const texts = {
     planned: 'Goes by “{{title}}”: {{day}}, as planned',
     actual: 'Goes by “{{title}}”: the day on which it is done',
     seen: 'Goes by {{marker}}: {{phenomenon}}, as seen this year',
+    signSeen: 'Goes by {{sign}}, as seen this year',
+    moonSeen: 'Goes by {{sign}}, number {{nth}} of the year, as seen this year',
   },
   leadAlone: {
     nature: '{{name}}, usually {{from}} to {{to}}',
     planned: '“{{title}}”: {{day}}, as planned',
     actual: '“{{title}}”: the day on which it is done',
     seen: '{{marker}}: {{phenomenon}}, as seen this year',
+    signSeen: '{{sign}}, as seen this year',
+    moonSeen: '{{sign}}, number {{nth}} of the year, as seen this year',
   },
   /** `beside` says the other counting, too. */
   counted: {
@@ -63,10 +67,16 @@ export const texts = {
   },
   form: {
     chooseFirst: 'Its days are counted once a work is chosen that does not wait for this one.',
+    asSeen: 'Counted from the day on which people see it',
+    asSeenHint: 'Until then the computed day stands. Both countings are shown.',
     seen: 'It was seen this year',
     seenOn: 'On which morning or evening',
     seenBy: 'Who saw it',
     agreedBy: 'Which elder says so, too',
+    farFromComputed_one:
+      'This is {{count}} day from the computed day. Look once more at the day, and at what was seen.',
+    farFromComputed_other:
+      'This is {{count}} days from the computed day. Look once more at the day, and at what was seen.',
     natureName: 'As people call it',
     usualFrom: 'Usually from',
     usualTo: 'Usually to',

@@ -1,18 +1,25 @@
 import { useTranslation } from 'react-i18next';
+import type { EntryDates } from '#shared/contracts/calendars.js';
 import { PLANNED_DAYS } from '#shared/contracts/entry-lead.js';
+import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { SelectField, TextField, TickField } from '#src/ui/field.js';
 import type { FormState } from '../model/form-state.js';
 import { MonthDayFields } from '#src/lib/month-day-fields.js';
 import { LineField } from '#src/ui/said-fields.js';
+import { Care } from '#src/ui/surfaces.js';
 
 interface AnchorProps {
   form: FormState;
 }
 
-/** The day on which the star was seen this year: who saw it, and which elder says so, too. */
+/** So far from the computed day hardly anybody sees the same thing: rather a slip of the hand, or another star. */
+const FAR_DAYS = 21;
+
+/** The day on which it was seen this year: who saw it, and which elder says so, too. */
 export function SeenFields({ form }: AnchorProps) {
   const { t } = useTranslation('anchors');
-  const { draft, change, at, year } = form;
+  const { draft, change, at, year, dates } = form;
+  const away = daysFromComputed(dates);
   const { seen } = draft;
   const set = (patch: Partial<NonNullable<typeof seen>>) => {
     if (seen !== null) change({ seen: { ...seen, ...patch } });
@@ -57,8 +64,20 @@ export function SeenFields({ form }: AnchorProps) {
           />
         </div>
       )}
+      {away > FAR_DAYS && (
+        <Care>
+          <p>{t('form.farFromComputed', { count: away })}</p>
+        </Care>
+      )}
     </div>
   );
+}
+
+/** Zero while nothing was seen, and where nothing was computed. */
+function daysFromComputed(dates: EntryDates | null): number {
+  const seen = dates?.counted?.basis === 'seen' ? dates.counted.from : null;
+  if (seen === null || !dates?.marker) return 0;
+  return Math.abs(dayNumberFromIso(seen) - dates.marker.expected.dayNumber);
 }
 
 /** A sign of nature with its usual days. */

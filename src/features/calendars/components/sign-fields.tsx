@@ -7,7 +7,7 @@ import { markerName } from '#src/lib/marker-names.js';
 import { useMarkerDayWords } from '#src/lib/marker-day-words.js';
 import { useSkySignWords } from '#src/lib/sky-sign-words.js';
 import { Button } from '#src/ui/button.js';
-import { FieldNotes, SelectField } from '#src/ui/field.js';
+import { FieldNotes, SelectField, TickField } from '#src/ui/field.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { ComboField, type ComboOption } from '#src/ui/combo-field.js';
 import { PickGroup } from '#src/ui/pick.js';
@@ -16,6 +16,7 @@ import { hasSign } from '../model/entry-draft.js';
 import type { FormState } from '../model/form-state.js';
 import { findMarkers } from '../model/marker-search.js';
 import type { Markers } from '../model/preview-dates.js';
+import { SeenFields } from './anchor-fields.js';
 import { SignParameters } from './sign-parameters.js';
 
 /** Kinds for which somebody may look towards the Sun. */
@@ -42,7 +43,7 @@ function useStarOptions(markers: Markers | null): ComboOption[] | null {
 
 /** The sign of the sky that leads, and which of its two days where a year has two. */
 export function SignFields({ form, onSearch }: { form: FormState; onSearch: () => void }) {
-  const { t } = useTranslation(['calendars', 'sky']);
+  const { t } = useTranslation(['calendars', 'sky', 'anchors']);
   const days = useMarkerDayWords();
   const sign = useSkySignWords();
   const labelId = useId();
@@ -51,7 +52,7 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
   const problem = at('lead.spec.markerKey') ?? at('lead.spec');
   const occurrences = form.sign?.occurrences ?? [];
   const setSpec = (spec: SkyMarkerSpec) => {
-    change({ sky: { spec, occurrence: 1 } });
+    change({ sky: { ...sky, spec, occurrence: 1 } });
   };
   const starOptions = useStarOptions(form.markers);
   return (
@@ -132,6 +133,18 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
           })}
         />
       )}
+      {hasSign(sky) && (
+        <TickField
+          label={t('anchors:form.asSeen')}
+          hint={t('anchors:form.asSeenHint')}
+          checked={sky.seen === null}
+          onChange={(event) => {
+            const { spec, occurrence } = sky;
+            change({ sky: { spec, occurrence, ...(event.currentTarget.checked && { seen: null }) } });
+          }}
+        />
+      )}
+      {sky.seen === null && <SeenFields form={form} />}
     </div>
   );
 }

@@ -1,3 +1,4 @@
+import { seenOf, withSeen } from '#shared/calendar/as-seen.js';
 import { isStarLead, type StarLead } from '#shared/calendar/entry-model.js';
 import type { PlannedDay, SeenDay } from '#shared/contracts/entry-lead.js';
 import {
@@ -24,10 +25,10 @@ export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate' | 'reco
   leadType: EntryLead['type'];
   /** `markerKey` is empty until a star or figure is chosen. */
   marker: Omit<MarkerLead, 'type'>;
-  /** Without a star until a sign is chosen; see `hasSign`. */
-  sky: Omit<SkyLead, 'type'>;
+  /** Without a star until a sign is chosen; see `hasSign`. Whether its day as seen leads; that day is `seen`. */
+  sky: Omit<SkyLead, 'type' | 'seen'> & { seen?: null };
   fixed: Omit<FixedLead, 'type'>;
-  /** The star's day as people saw it this year, where `leadType` is "as seen". */
+  /** The day as people saw it this year, where what leads goes as seen. */
   seen: SeenDay | null;
   nature: Omit<NatureLead, 'type'>;
   /** The other entry, and which of its planned days; empty until one is chosen. */
@@ -59,9 +60,9 @@ export function draftOf(content: EntryInput): EntryDraft {
     ...rest,
     leadType: lead.type,
     marker: isStarLead(lead) ? markerOf(lead) : NO_MARKER,
-    sky: lead.type === 'sky' ? withoutType(lead) : NO_SKY,
+    sky: lead.type === 'sky' ? skyOf(lead) : NO_SKY,
     fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
-    seen: lead.type === 'marker-as-seen' ? lead.seen : null,
+    seen: seenOf(lead),
     nature: lead.type === 'nature-sign' ? withoutType(lead) : NO_NATURE,
     anchor: anchorPart(lead),
     lastDate: lastDate ?? NO_FIXED,
@@ -82,7 +83,7 @@ export function contentOf(draft: EntryDraft): EntryInput {
   const { sharing, giverId, record, kindWord, ...rest } = said;
   const leads: Record<EntryLead['type'], EntryLead> = {
     marker: { type: 'marker', ...marker },
-    sky: { type: 'sky', ...sky },
+    sky: withSeen<EntryLead>({ type: 'sky', ...sky }, seen),
     'fixed-date': { type: 'fixed-date', ...fixed },
     'marker-as-seen': { type: 'marker-as-seen', ...marker, seen },
     'nature-sign': { type: 'nature-sign', ...nature },
@@ -101,7 +102,7 @@ export function contentOf(draft: EntryDraft): EntryInput {
   };
 }
 
-type WantedLead = MarkerLead | SkyLead;
+type WantedLead = MarkerLead | Omit<SkyLead, 'seen'>;
 
 /** The part of a draft that a wanted marker sets; without one, a star is still to be chosen. */
 function withLead(wanted: WantedLead | null): Pick<EntryDraft, 'leadType' | 'marker' | 'sky'> {
@@ -164,6 +165,10 @@ function tidy(content: EntryInput): EntryInput {
 
 function markerOf({ markerKey, phenomenon, occurrence }: StarLead): EntryDraft['marker'] {
   return { markerKey, phenomenon, occurrence };
+}
+
+function skyOf({ spec, occurrence, seen }: SkyLead): EntryDraft['sky'] {
+  return { spec, occurrence, ...(seen === undefined ? {} : { seen: null }) };
 }
 
 function anchorPart(lead: EntryLead): EntryDraft['anchor'] {

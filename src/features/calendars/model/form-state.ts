@@ -1,3 +1,4 @@
+import { goesAsSeen } from '#shared/calendar/as-seen.js';
 import type { EntryDates, EntryInput } from '#shared/contracts/calendars.js';
 import type { Language } from '#shared/contracts/people.js';
 import type { SkyMarkerYear } from '#shared/contracts/sky-markers.js';
@@ -52,17 +53,18 @@ export function isByStar({ leadType }: Pick<EntryDraft, 'leadType'>): boolean {
 
 /** The day from which the four days are counted; null while there is none. */
 export function leadDayNumber(
-  form: Pick<FormState, 'draft' | 'sign' | 'markers' | 'year' | 'dates'>,
+  form: Pick<FormState, 'draft' | 'content' | 'sign' | 'markers' | 'year' | 'dates'>,
 ): number | null {
   const { draft, year } = form;
   if (draft.leadType === 'fixed-date') {
     const { month, day } = draft.fixed.date;
     return monthDay.safeParse(draft.fixed.date).success ? dayNumberOf(year, month, day) : null;
   }
-  if (draft.leadType === 'sky') {
+  const isSeen = draft.seen !== null && goesAsSeen(form.content.lead);
+  if (draft.leadType === 'sky' && !isSeen) {
     return form.sign?.occurrences[draft.sky.occurrence - 1]?.expected.dayNumber ?? null;
   }
-  if (!isByStar(draft) || (draft.leadType === 'marker-as-seen' && draft.seen !== null)) {
+  if (!isByStar(draft) || isSeen) {
     const from = form.dates?.counted?.from ?? null;
     return from === null ? null : dayNumberFromIso(from);
   }

@@ -1,3 +1,4 @@
+import { seenOf } from '#shared/calendar/as-seen.js';
 import { entryDatesFromDays, inOrder } from '#shared/calendar/entry-dates.js';
 import { overlappingEntryIds } from '#shared/calendar/overlap.js';
 import { isStarLead } from '#shared/calendar/entry-model.js';
@@ -28,6 +29,7 @@ export function previewDates(
   if (lead.type === 'fixed-date') {
     return monthDay.safeParse(lead.date).success ? entryDatesFromDays(known, year, null) : null;
   }
+  if (seenOf(lead) !== null && !seenDay.shape.date.safeParse(seenOf(lead)?.date).success) return null;
   if (lead.type === 'sky') {
     const sign = signOf(signs, lead.spec);
     return sign && entryDatesFromDays(known, year, sign);
@@ -39,13 +41,6 @@ export function previewDates(
   }
   // What is counted from another entry waits until all of them are at hand; see `shown-entries.ts`.
   if (!isStarLead(lead)) return null;
-  if (
-    lead.type === 'marker-as-seen' &&
-    lead.seen !== null &&
-    !seenDay.shape.date.safeParse(lead.seen.date).success
-  ) {
-    return null;
-  }
   const row = markers?.get(lead.markerKey);
   return row ? entryDatesFromDays(known, year, { ...row, year }) : null;
 }

@@ -153,11 +153,13 @@ describe('a lead in another year', () => {
     expect(leadForAnotherYear({ type: 'marker-as-seen', ...star, seen }, ids)).toEqual({
       ...{ type: 'marker-as-seen', ...star, seen: null },
     });
+    const moon = { type: 'sky', spec: { kind: 'moon-phase', event: 'full' }, occurrence: 7 } as const;
+    expect(leadForAnotherYear({ ...moon, seen }, ids)).toEqual({ ...moon, seen: null });
     const usual = { from: { month: 5, day: 1 }, to: { month: 5, day: 9 } };
     const asTheyAre: EntryLead[] = [
       SOWING,
       { type: 'marker', ...star },
-      { type: 'sky', spec: { kind: 'moon-phase', event: 'full' }, occurrence: 7 },
+      moon,
       { type: 'nature-sign', name: 'the hoopoe', usual, source: 'the village' },
     ];
     for (const lead of asTheyAre) expect(leadForAnotherYear(lead, ids)).toBe(lead);

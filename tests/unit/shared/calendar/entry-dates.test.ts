@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import type { SeenDay } from '#shared/calendar/entry-model.js';
 import { entryDatesFromDays, entryDatesOf, inOrder, occurrenceDaysOf } from '#shared/calendar/entry-dates.js';
 import { markerYear, occurrence, timing } from '#tests/support/calendar-facts.js';
 
@@ -217,6 +218,20 @@ describe('an entry that goes by another sign of the sky', () => {
   it('says so where the year has the sign only once', () => {
     const second = timing({ lead: { ...lead, occurrence: 2 } });
     expect(entryDatesFromDays(second, 2027, sign).warnings).toEqual(['one-occurrence-only']);
+  });
+
+  it('is counted from the day on which people saw it, with the computed counting beside', () => {
+    const computed = entryDatesFromDays(timing({ lead }), 2027, sign);
+    const asSeen = (seen: SeenDay | null) => timing({ lead: { ...lead, seen } });
+    expect(entryDatesFromDays(asSeen(null), 2027, sign)).toEqual(computed);
+    const seen = { date: '2027-01-10', by: 'Tirel', agreedBy: 'Elder C-1' };
+    const dates = entryDatesFromDays(asSeen(seen), 2027, sign);
+    expect(dates.window?.earliest).toBe('2027-01-13');
+    expect(dates.marker).toEqual(computed.marker);
+    expect(dates.counted).toEqual({
+      ...{ basis: 'seen', from: '2027-01-10', to: '2027-01-10' },
+      beside: computed.window,
+    });
   });
 
   it('refuses the days of another sign or year: a date must never be lent', () => {

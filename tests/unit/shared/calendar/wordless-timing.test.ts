@@ -14,6 +14,7 @@ it('keeps what moves a day, and no word or name that anybody gave', () => {
       source: 'Marrun',
     },
     { type: 'marker-as-seen', ...star, seen },
+    { type: 'sky', spec: { kind: 'moon-phase', event: 'full' }, occurrence: 1, seen },
   ] as const;
   for (const lead of leads) {
     const entry = timing({

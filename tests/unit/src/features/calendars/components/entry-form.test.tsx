@@ -1,11 +1,12 @@
-import { screen, waitFor } from '@testing-library/react';
+import { fireEvent, screen, waitFor } from '@testing-library/react';
 import { afterEach, beforeEach, expect, it, vi } from 'vitest';
 import { EditorPage } from '#src/features/calendars/components/editor-page.js';
 import { answerWith, type Sent } from '#tests/support/answers.js';
 import { draftServer } from '#tests/support/draft-server.js';
 import { CALENDAR, tazimelMarkers, YEAR } from '#tests/support/draft-of-tazimel.js';
+import { skySign } from '#tests/support/finder-of-tazimel.js';
 import { renderOnBoard } from '#tests/support/on-board.js';
-import { starTable } from '#tests/support/stars-of-tazimel.js';
+import { starTable, TAZIMEL } from '#tests/support/stars-of-tazimel.js';
 
 // Whole screens over a real year of the sky: quick by themselves, slow on a busy machine.
 vi.setConfig({ testTimeout: 30_000 });
@@ -58,4 +59,27 @@ it('leaves whoever writes on in their field when a new entry comes to be saved, 
   expect(document.activeElement).toBe(crop);
   expect(crop.value).toBe('beans');
   expect(log.filter(({ method }) => method === 'POST')).toHaveLength(1);
+});
+
+it('counts a sign of the sky from the day on which people saw it, says both countings, and doubts a far day', async () => {
+  answerWith({
+    ...server(draft()),
+    [`POST /api/places/${TAZIMEL.id}/sky-markers`]: ({ body }: Sent) => skySign(body),
+  });
+  const sky = encodeURIComponent(JSON.stringify({ kind: 'sun-season', season: 'june-solstice' }));
+  const { user } = await renderOnBoard(
+    <EditorPage about={() => null} tasks={() => null} lockedAction={() => null} />,
+    { path: `/calendars/${CALENDAR.id}?entry=new-x&sky=${sky}`, pattern: '/calendars/:calendarId' },
+  );
+  await user.click(await screen.findByRole('checkbox', { name: /from the day on which people see it/ }));
+  await user.click(screen.getByRole('checkbox', { name: 'It was seen this year' }));
+  const seenOn = (date: string) =>
+    fireEvent.change(screen.getByLabelText('On which morning or evening'), { target: { value: date } });
+  seenOn(`${YEAR}-06-24`);
+  const counted =
+    /Counted from 24.June, when it was seen\. By the computed day the best days would be 21 to 28.June/u;
+  await waitFor(() => expect(document.body.textContent).toMatch(counted), { timeout: 10_000 });
+  expect(screen.queryByText(/days from the computed day/)).toBeNull();
+  seenOn(`${YEAR}-11-20`);
+  expect(await screen.findByText(/152 days from the computed day/)).toBeTruthy();
 });
