@@ -17,19 +17,38 @@ export interface WindowCells {
   offsetsDays: Readonly<Record<OffsetColumn, number | null>>;
 }
 
-export type WindowProblem = ImportDateProblem | 'date-missing' | 'mixed-dates' | 'days-missing';
+export type WindowProblem =
+  | ImportDateProblem
+  | 'date-missing'
+  | 'mixed-dates'
+  | 'days-missing'
+  /** At the first of two days that are probably the wrong way round, and at the second of them. */
+  | 'swapped-first'
+  | 'swapped-second';
+
+interface WindowIssue {
+  column: 'when' | WindowDay | OffsetColumn;
+  problem: WindowProblem;
+}
 
 /** What a line's days come to, or what is the matter, by column. */
 export type WindowRead =
-  | { problems: readonly { column: 'when' | WindowDay | OffsetColumn; problem: WindowProblem }[] }
+  | { problems: readonly WindowIssue[] }
   | { problems: readonly []; lead: NamedSign | { type: 'day'; date: MonthDay }; offsets: EntryOffsets };
 
 const DAYS_OF_A_YEAR = 365;
+/** Over the year's end from one day to the next one; where it would be longer, the two are probably the wrong way round. */
+export const LONGEST_OVER_YEARS_END_DAYS = 183;
+/** Which day of a ten-day part a column means. */
+const EDGE = {
+  ...{ when: 'first', earliest: 'first', bestFrom: 'first', bestTo: 'last', lastAdvised: 'last' },
+} as const satisfies Record<'when' | WindowDay, 'first' | 'last'>;
 
 /**
  * What leads a line and how many days before and after it its window lies. A sign leads where one is named, in the column
  * for it or in the days themselves; then the margins may still come from plain days, whose distance is what counts. Else
- * the first best day leads. A later day that lies before an earlier one is the next year's.
+ * the first best day leads. A later day that lies before an earlier one is the next year's, save where that is so far off
+ * that the two are probably the wrong way round; both with their years are taken as they stand.
  */
 export function windowOfCells({ when, days, offsetsDays }: WindowCells): WindowRead {
   const all = [['when', when] as const, ...WINDOW_DAYS.map((name) => [name, days[name]] as const)];
@@ -37,6 +56,8 @@ export function windowOfCells({ when, days, offsetsDays }: WindowCells): WindowR
     cell.kind === 'problem' ? [{ column, problem: cell.problem }] : [],
   );
   if (broken.length > 0) return { problems: broken };
+  const swapped = swappedDays(when, days, offsetsDays);
+  if (swapped.length > 0) return { problems: swapped };
   const named = all.flatMap(([column, cell]) => (cell.kind === 'sign' ? [{ column, ...cell }] : []));
   const [first] = named;
   if (first === undefined) return byDays(when, days, offsetsDays);
@@ -58,15 +79,15 @@ function bySign(
   const base = when.kind === 'sign' && when.offsetDays !== 0 ? when.offsetDays : null;
   const from = own('bestFrom') ?? base;
   if (from === null) return { problems: [{ column: 'bestFromDays', problem: 'days-missing' }] };
-  const to = own('bestTo') ?? from + (apart(days.bestFrom, days.bestTo, 'last') ?? 0);
+  const to = own('bestTo') ?? from + (apart(days, 'bestFrom', 'bestTo') ?? 0);
   return {
     problems: [],
     lead,
     offsets: {
-      earliestDays: own('earliest') ?? from - (apart(days.earliest, days.bestFrom, 'first') ?? 0),
+      earliestDays: own('earliest') ?? from - (apart(days, 'earliest', 'bestFrom') ?? 0),
       bestFromDays: from,
       bestToDays: to,
-      lastAdvisedDays: own('lastAdvised') ?? to + (apart(days.bestTo, days.lastAdvised, 'last') ?? 0),
+      lastAdvisedDays: own('lastAdvised') ?? to + (apart(days, 'bestTo', 'lastAdvised') ?? 0),
     },
   };
 }
@@ -117,9 +138,46 @@ function toLead(
 }
 
 /** Days from one plain day to the next that comes; null where either is none. */
-function apart(from: DateCell, to: DateCell, end: 'first' | 'last'): number | null {
+function apart(days: WindowCells['days'], sooner: WindowDay, later: WindowDay): number | null {
+  const [from, to] = [days[sooner], days[later]];
   if (from.kind !== 'day' || to.kind !== 'day') return null;
-  return forward(end === 'first' ? from.first : from.last, to[end]);
+  return forward(from[EDGE[sooner]], to[EDGE[later]]);
+}
+
+/** The first two days that are probably the wrong way round; days that stand in numbers are not measured. */
+function swappedDays(
+  when: DateCell,
+  days: WindowCells['days'],
+  offsetsDays: WindowCells['offsetsDays'],
+): WindowIssue[] {
+  for (const lead of ['bestFrom', 'when'] as const) {
+    const row = (['earliest', lead, 'bestTo', 'lastAdvised'] as const).flatMap((column) => {
+      const cell = column === 'when' ? when : days[column];
+      return cell.kind === 'day' ? [{ column, date: cell[EDGE[column]], year: cell.year }] : [];
+    });
+    for (const [index, later] of row.entries()) {
+      const sooner = row[index - 1];
+      if (sooner === undefined || !isFarOverYearsEnd(sooner, later)) continue;
+      const counted = later.column === 'bestFrom' || later.column === 'when' ? 'earliest' : later.column;
+      if (offsetsDays[`${counted}Days`] !== null) continue;
+      return [
+        { column: sooner.column, problem: 'swapped-first' },
+        { column: later.column, problem: 'swapped-second' },
+      ];
+    }
+  }
+  return [];
+}
+
+interface DatedDay {
+  date: MonthDay;
+  year: number | null;
+}
+
+function isFarOverYearsEnd(sooner: DatedDay, later: DatedDay): boolean {
+  const isOverYearsEnd = numberOf(later.date) < numberOf(sooner.date);
+  const isSaidSo = sooner.year !== null && later.year !== null && later.year > sooner.year;
+  return isOverYearsEnd && !isSaidSo && forward(sooner.date, later.date) > LONGEST_OVER_YEARS_END_DAYS;
 }
 
 /** By a year without a leap day, as a day of every year is. */

@@ -271,6 +271,10 @@ export const texts = {
     'unknown-sign-words':
       'No sign of the sky goes by these words. Name a star with its day, such as “Pleiades, first morning”, write a day of the year, or say above that it is a sign of nature.',
     'date-missing': 'This line says no day. Name a sign, or write from when the best days are.',
+    'swapped-first':
+      'From this day to the one named next it would be more than half a year, over the year’s end.',
+    'swapped-second':
+      'This day and the one named before are probably the wrong way round: swap them. If it really lasts so long, write both with their years, such as 2027-10-01 and 2028-05-31.',
     'mixed-dates': 'This line names two signs. Let all its days go by one of them.',
     'days-missing': 'Say how many days after the sign the best days begin; a minus means before it.',
     'unknown-kind': 'This kind is not known. Use one such as farm, household, community, belief or safety.',

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { dateCell, type ImportDateFacts } from '#shared/calendar/import-dates.js';
-import { WINDOW_DAYS, windowOfCells } from '#shared/calendar/import-window.js';
+import { LONGEST_OVER_YEARS_END_DAYS, WINDOW_DAYS, windowOfCells } from '#shared/calendar/import-window.js';
 import { TABLE_WORDS } from '#server/features/imports/import-words.js';
 
 const FACTS: ImportDateFacts = {
@@ -64,6 +64,50 @@ describe('the days of a line', () => {
     expect(line({ bestFrom: 'June dekad 2' })).toMatchObject({ offsets: offsets(0, 0, 9, 9) });
     expect(line({ when: '07-05', bestFrom: '07-03', bestTo: '07-05' })).toMatchObject({
       ...{ lead: { date: { month: 7, day: 5 } }, offsets: offsets(-2, -2, 0, 0) },
+    });
+  });
+
+  const swapped = (first: string, second: string) => [
+    { column: first, problem: 'swapped-first' },
+    { column: second, problem: 'swapped-second' },
+  ];
+
+  it.each([
+    [{ bestFrom: '10 May', bestTo: '3 May' }, 'bestFrom', 'bestTo'],
+    [{ earliest: '10 May', bestFrom: '3 May', bestTo: '20 May' }, 'earliest', 'bestFrom'],
+    [{ bestFrom: '3 May', bestTo: '20 May', lastAdvised: '12 May' }, 'bestTo', 'lastAdvised'],
+    [{ bestFrom: '10 May', lastAdvised: '3 May' }, 'bestFrom', 'lastAdvised'],
+    [{ when: '10 May', bestTo: '3 May' }, 'when', 'bestTo'],
+    [{ when: '10 May', bestFrom: '5 May', bestTo: '7 May' }, 'when', 'bestTo'],
+    [{ when: 'Pleiades first morning +7', bestFrom: '10 May', bestTo: '3 May' }, 'bestFrom', 'bestTo'],
+    [{ bestFrom: '2027-05-10', bestTo: '2027-05-03' }, 'bestFrom', 'bestTo'],
+  ])('are asked about at both columns where they are probably the wrong way round: %j', (cells, one, two) => {
+    expect(line(cells).problems).toEqual(swapped(one, two));
+  });
+
+  it('may go over the year’s end for half a year, and further where both years are said', () => {
+    expect(LONGEST_OVER_YEARS_END_DAYS).toBe(183);
+    const toOf = (bestFrom: string, bestTo: string) => line({ bestFrom, bestTo });
+    expect(toOf('20 Dec', '15 Jan')).toMatchObject({ problems: [], offsets: offsets(0, 0, 26, 26) });
+    expect(toOf('1 Oct', '2 April')).toMatchObject({ problems: [], offsets: offsets(0, 0, 183, 183) });
+    expect(toOf('1 Oct', '3 April').problems).toEqual(swapped('bestFrom', 'bestTo'));
+    expect(toOf('2027-10-01', '2028-05-31')).toMatchObject({ problems: [], offsets: { bestToDays: 242 } });
+    // Within one year they may last as long as they do.
+    expect(toOf('1 Jan', '31 Dec')).toMatchObject({ problems: [], offsets: { bestToDays: 364 } });
+  });
+
+  it('are not measured where numbers say how long', () => {
+    const days = { bestFrom: '10 May', bestTo: '3 May' };
+    expect(line({ when: 'Pleiades first morning', ...days }, { bestFromDays: 7, bestToDays: 23 })).toEqual({
+      ...{ problems: [], lead: rising, offsets: offsets(7, 7, 23, 23) },
+    });
+  });
+
+  it('begin with the first of ten days and end with the last, whatever leads', () => {
+    const days = { bestFrom: 'June dekad 2', bestTo: 'June dekad 2' };
+    expect(line(days)).toMatchObject({ offsets: offsets(0, 0, 9, 9) });
+    expect(line({ when: 'Pleiades first morning +7', ...days })).toMatchObject({
+      offsets: offsets(7, 7, 16, 16),
     });
   });
 
