@@ -4,6 +4,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Calendar, Entry, EntryInput } from '#shared/contracts/calendars.js';
 import { EMPTY_RECORD } from '#shared/contracts/event-record.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -57,6 +58,48 @@ describe('the words of a village', () => {
     const { content } = await only();
     expect(content).toMatchObject({ kind: 'farm', kindWord: { word: 'Work of the terraces' } });
     expect(content.record?.what).toMatchObject({ operation: 'weed', operationWord: { word: 'pull grass' } });
+  });
+
+  it('are followed by a crop that is just such a word, while versions and longer words stay', async () => {
+    const { key } = await addWord(officer, 'crops', { word: 'Millet', like: null });
+    const giver = { giver: 'Elder A-1', ifLate: 'Sow beans.' };
+    for (const crop of ['Millet', ' MILLET', 'Millet, beans']) {
+      await addEntry(officer, calendar.id, { ...giver, crop });
+    }
+    const version = await publishDraft(village, calendar.id);
+    await changeWords(officer, 'crops', renaming(key, 'Long millet'));
+    const crops = (await entriesOf(officer, calendar.id)).map(({ content }) => content.crop);
+    expect(crops).toEqual(['Long millet', 'Long millet', 'Millet, beans']);
+    const frozen = (await readVersion(officer, version)).entries.map(({ content }) => content.crop);
+    expect(frozen).toEqual(['Millet', 'MILLET', 'Millet, beans']);
+  });
+
+  it('change places among crops in one save, and an entry whose form is open is not written over', async () => {
+    const first = await addWord(officer, 'crops', { word: 'Millet', like: null });
+    const second = await addWord(officer, 'crops', { word: 'Barley', like: null });
+    const { id, content, version } = await addEntry(officer, calendar.id, { crop: 'Millet' });
+    await addEntry(officer, calendar.id, { crop: 'Barley' });
+    await changeWords(officer, 'crops', (items) =>
+      items.map((item) => ({ ...item, word: item.key === first.key ? second.word : first.word })),
+    );
+    expect((await entriesOf(officer, calendar.id)).map((entry) => entry.content.crop)).toEqual([
+      'Barley',
+      'Millet',
+    ]);
+    const late = await officer.put(`/api/calendars/${calendar.id}/entries/${id}`, { content, version });
+    expect(reasonOf(late)).toBe('409 stale');
+  });
+
+  it('reach no crop of another village', async () => {
+    const stranger = await api.signIn('officer2');
+    const { communityId } = stranger;
+    const { id: placeId } = await api.dataSource.getRepository(PlaceEntity).findOneByOrFail({ communityId });
+    const theirs = await beginCalendar({ ...village, officer: stranger, placeId });
+    await addEntry(stranger, theirs.id, { crop: 'Millet' });
+    const { key } = await addWord(officer, 'crops', { word: 'Millet', like: null });
+    await changeWords(officer, 'crops', renaming(key, 'Long millet'));
+    const [entry] = await entriesOf(stranger, theirs.id);
+    expect(entry?.content.crop).toBe('Millet');
   });
 
   it('make nobody a writer: saving an entry that only follows its list changes nothing', async () => {

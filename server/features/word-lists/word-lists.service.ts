@@ -21,6 +21,7 @@ import { conflict, invalidField, stale } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { lockCommunity } from '../people/people.service.js';
+import { renameCropsInDrafts, renamedCrops } from './draft-crops.service.js';
 
 /** What a village calls kinds of events, kinds of work, and crops. Entries ask `known-words.service.ts`. */
 export class WordListsService {
@@ -53,6 +54,9 @@ export class WordListsService {
         { communityId, list, items, version, updatedBy: person.id, updatedAt: at },
         ['communityId', 'list'],
       );
+      if (list === 'crops') {
+        await renameCropsInDrafts(manager, communityId, renamedCrops(current.items, items));
+      }
       await this.record(manager, actor, list, at);
       return { version, items };
     });

@@ -2,8 +2,12 @@
 export const texts = {
   title: 'Words of this village',
   lead: 'What the village calls things. Drafts follow at once; versions keep the words of the day on which they were frozen.',
-  asksAnew:
-    'Where a word changes, the next submission says something new: elders are asked again about the entries that use it.',
+  asks: {
+    kinds: 'Where a word changes, elders are asked again about the entries that use it.',
+    operations: 'Where a word changes, elders are asked again about the entries that use it.',
+    crops:
+      'Where a crop is called otherwise, elders are asked again about the entries that follow: nothing but its name says what is grown.',
+  },
   everybody: 'Everybody of the village reads these words. A name that is to be kept does not belong here.',
   readOnly: 'The officer of the village changes these words.',
   list: {
@@ -17,7 +21,7 @@ export const texts = {
       'A kind keeps its rules whatever it is called: what belief keeps to the elders, what farm work and safety must say.',
     operations: 'Sowing, harvest, fire and the like keep their rules whatever they are called.',
     crops:
-      'Crops are offered where an entry is written, with their days from sowing to harvest. Entries keep the crop that was written in them.',
+      'Crops are offered where an entry is written, with their days from sowing to harvest. An entry keeps the days that were written in it.',
   },
   row: {
     usual: 'usually “{{name}}”',
@@ -49,6 +53,19 @@ export const texts = {
     word: 'Word',
     wordHint: 'Leave it empty to go back to “{{name}}”.',
     like: 'It behaves like',
+    renames: {
+      kinds:
+        'Once this is saved, every entry of a draft that is called “{{before}}” is called “{{now}}”. Versions keep “{{before}}”.',
+      operations:
+        'Once this is saved, every entry of a draft that says “{{before}}” for its work says “{{now}}”. Versions keep “{{before}}”.',
+      crops:
+        'Once this is saved, every entry of a draft whose crop is just “{{before}}” says “{{now}}”. Where more is written there, it stays as it is. Versions keep “{{before}}”.',
+    },
+    asks: {
+      kinds: 'With the next submission elders are asked again about these entries.',
+      operations: 'With the next submission elders are asked again about these entries.',
+      crops: 'With the next submission elders are asked again about these entries.',
+    },
     likeHint: 'Its rules are that one’s for good. What belongs to belief begins with the elders.',
     fromDays: 'Days from sowing to harvest, at least',
     toDays: 'At most',

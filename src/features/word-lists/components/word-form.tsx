@@ -18,6 +18,7 @@ import { useToast } from '#src/ui/toast.js';
 import type { OneListProps } from '../model/one-list.js';
 import { useUsualName } from '../model/usual-names.js';
 import { withWord } from '../model/word-changes.js';
+import { RenameNote } from './rename-note.js';
 
 interface WordFormProps extends OneListProps {
   word: ListedWord;
@@ -152,6 +153,7 @@ export function WordForm({ communityId, list, stored, word, onDone }: WordFormPr
           }}
         />
       )}
+      <RenameNote list={list} stored={word} written={written} />
       <Button type="submit" look="main" full busy={save.isPending}>
         {t('form.save')}
       </Button>

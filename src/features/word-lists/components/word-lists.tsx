@@ -75,7 +75,7 @@ function OneList(props: OneListProps) {
         <div className="mb-3 grid gap-1 text-small">
           <p>{t(`about.${list}`)}</p>
           <p>{mayWrite ? t('everybody') : t('readOnly')}</p>
-          {mayWrite && list !== 'crops' && <p>{t('asksAnew')}</p>}
+          {mayWrite && <p>{t(`asks.${list}`)}</p>}
         </div>
         {stored.items.length === 0 ? (
           <EmptyState title={t('none')} action={mayWrite ? add : undefined}>
