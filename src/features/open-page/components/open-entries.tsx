@@ -10,7 +10,7 @@ interface OpenEntriesProps {
   year: number;
 }
 
-/** In the order of their days, those without any last. */
+/** In the order of their days, those without any last. Lines stand below entries, so that both columns begin at one height. */
 export function OpenEntries({ entries, markers, year }: OpenEntriesProps) {
   const byDay = entries.toSorted((a, b) => dayOf(a).localeCompare(dayOf(b)));
   return (
@@ -18,7 +18,7 @@ export function OpenEntries({ entries, markers, year }: OpenEntriesProps) {
       {byDay.map((entry) => (
         <li
           key={entry.entryId}
-          className="break-inside-avoid border-t border-hairline py-3 first:border-0 first:pt-0"
+          className="mb-3 break-inside-avoid border-b border-hairline pb-3 last:mb-0 last:border-0 last:pb-0"
         >
           <Entry entry={entry} markers={markers} year={year} />
         </li>
