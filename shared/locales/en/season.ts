@@ -2,6 +2,10 @@
 export const texts = {
   title: 'Looking back at {{year}}',
   under: '{{place}}. By the calendar {{label}}',
+  underWithDraft_one:
+    '{{place}}. By the calendar {{label}}, and {{count}} entry that stands in the draft alone',
+  underWithDraft_other:
+    '{{place}}. By the calendar {{label}}, and {{count}} entries that stand in the draft alone',
   underDraft: '{{place}}. By the draft: nothing is published',
   lead: 'For the meeting at the end of the season: what was planned beside what happened. Nobody is right or wrong here, and nothing is averaged.',
   trouble: 'The year could not be brought up',

@@ -15,7 +15,7 @@ export function PrintedSeason({ review }: { review: SeasonReview }) {
   const dates = useDateWords();
   const words = useSeasonWords();
   const said = useSaidWords(words);
-  const { year, label, placeName: place, entries, notices, lessons, decisions, villageLanguageTag } = review;
+  const { year, entries, notices, lessons, decisions, villageLanguageTag } = review;
   const rows = entries.map((entry) => ({
     entry,
     cells: [
@@ -38,7 +38,7 @@ export function PrintedSeason({ review }: { review: SeasonReview }) {
     ]),
     wide.map(({ length }) => length),
   );
-  const under = label === null ? t('underDraft', { place }) : t('under', { place, label });
+  const under = words.under(review);
   const heads = {
     running: t('sheet.running', { title: t('title', { year }), under }),
     number: t('sheet.page', { page: PAGE, pages: PAGES }),

@@ -15,6 +15,7 @@ import { Mast, Page } from '#src/ui/page.js';
 import { Board } from '#src/ui/surfaces.js';
 import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import { seasonReviewQuery } from '../api/season-queries.js';
+import { useSeasonWords } from '../model/season-words.js';
 import { Decisions } from './decisions.js';
 import { EntryReview, type Writing } from './entry-review.js';
 import { Lessons } from './lessons.js';
@@ -47,18 +48,15 @@ export function SeasonReviewPage() {
 
 function Year({ review, writing }: { review: SeasonReview; writing: Writing }) {
   const { t } = useTranslation('season');
-  const { calendarId, placeName: place, year, label, entries, nextCalendarId } = review;
+  const words = useSeasonWords();
+  const { calendarId, year, entries, nextCalendarId } = review;
   const titles = new Map(entries.map(({ entryId, titleOfficer }) => [entryId, titleOfficer]));
   const next = year + 1;
   return (
     <EntryTitles titles={titles}>
       <Page className="season">
         <div className="season-screen">
-          <Mast
-            title={t('title', { year })}
-            under={label === null ? t('underDraft', { place }) : t('under', { place, label })}
-            backTo={paths.calendars()}
-          />
+          <Mast title={t('title', { year })} under={words.under(review)} backTo={paths.calendars()} />
           <p className="mb-4 max-w-prose">{t('lead')}</p>
           {/* Below the title: beside it a phone has no room for both. */}
           <div className="mb-4">

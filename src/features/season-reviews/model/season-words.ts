@@ -9,6 +9,8 @@ const AT_DAWN: readonly Phenomenon[] = ['heliacal-rising', 'cosmical-setting'];
 
 /** What a line of the year says, in words: on the screen and on paper alike. */
 export interface SeasonWords {
+  /** Below the title: by what the year is told, and how many of its entries the published calendar does not hold. */
+  under: (review: Pick<SeasonReview, 'placeName' | 'label' | 'entries'>) => string;
   planned: (entry: ReviewedEntry, review: Pick<SeasonReview, 'year' | 'label'>) => string;
   /** The days on which it was done, with who said so where `withVoice`; null where nobody wrote them down. */
   done: (entry: ReviewedEntry, withVoice?: boolean) => string | null;
@@ -23,6 +25,11 @@ export function useSeasonWords(): SeasonWords {
   const words = useEntryWords();
   return useMemo(
     () => ({
+      under: ({ placeName: place, label, entries }) => {
+        if (label === null) return t('underDraft', { place });
+        const count = entries.filter(({ isPublished }) => !isPublished).length;
+        return count === 0 ? t('under', { place, label }) : t('underWithDraft', { place, label, count });
+      },
       planned: (entry, { year, label }) => {
         const { window, counted } = entry.planned;
         if (window === null && counted?.basis === 'waiting') return t('planned.waiting');
