@@ -1,4 +1,5 @@
 import { barLegend } from './bar-legend.js';
+import { CARD_AREA, CARD_BOTTOM_MM, CARD_PITCH_MM, cardPage, stackedRows } from './card-page.js';
 import { daysInMonth, isoOf, nextLeapYears, weekdayOf } from './civil-days.js';
 import { dayHole, laneMiddle, rowBars } from './day-row.js';
 import type { DayRow } from './day-row.js';
@@ -6,58 +7,43 @@ import { lanesOfRow } from './lanes.js';
 import type { RowLanes, RowSpan } from './lanes.js';
 import { cardHead, holesOfMonth } from './month-head.js';
 import { moonDayMark, moonDayOf } from './moon-days.js';
-import { monthWords, undatedWords } from './month-words.js';
-import { barDown, FOOT, pageFoot } from './page-foot.js';
+import { monthWords } from './month-words.js';
+import { FOOT, pageFoot } from './page-foot.js';
 import type { Primitive, SheetPage } from './primitives.js';
 import type { SheetModel } from './sheet-model.js';
 import { spansOfMonth } from './spans.js';
 import { rule } from './strokes.js';
 import { capHeightMm, leadingMm, textBlock, textOnBaseline, wrapText } from './text-layout.js';
 import type { TextMeasurer, TextStyle } from './text-layout.js';
-import { watermarked } from './watermark.js';
 import { flowBlocks, LEGEND, LEGEND_BOLD, planCard, plainBlock } from './word-block.js';
-import type { WordRow } from './word-block.js';
+import { wordCards } from './word-cards.js';
 
-/** Month cards: A4 upright, seven holes a week, 25.4 mm apart both ways, like a bought pegboard. */
-export const CARD_PITCH_MM = 25.4;
-export const CARD_WIDTH_MM = 210;
-export const CARD_HEIGHT_MM = 297;
-const LEFT_MM = 16.1;
-const RIGHT_MM = LEFT_MM + 7 * CARD_PITCH_MM;
-const BOTTOM_MM = CARD_HEIGHT_MM - 8;
-const BAR_DOWN_X_MM = 10.2;
-const BAR_DOWN_TOP_MM = 62;
+const { left: LEFT_MM, right: RIGHT_MM } = CARD_AREA;
 const RING_DY_MM = 4.9;
 /** Higher than the day's number, so that the two are never read as one. */
 const MOON_DAY_DY_MM = 2.9;
 const LANES_TOP_MM = 8.8;
 const LANES_HEIGHT_MM = 16.2;
 const MAX_LANES = 4;
-/** On a page without holes the foot may take as much as it needs. */
-const FULL_FOOT_MM = 120;
 const WEEKDAY: TextStyle = { role: 'weekday', sizePt: 14, weight: 400 };
-const AREA = { left: LEFT_MM, right: RIGHT_MM };
 
-/** Twelve cards, each followed by what did not fit on it at full size, and a last one for what has no date. */
+/** Twelve cards, each followed by what did not fit on it at full size, and after them those that are no month's. */
 export function monthCards(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
   const months = Array.from({ length: 12 }, (_, index) => index + 1);
-  return [
-    ...months.flatMap((month) => cardsOfMonth(model, month, measurer)),
-    ...undatedCards(model, measurer),
-  ];
+  return [...months.flatMap((month) => cardsOfMonth(model, month, measurer)), ...wordCards(model, measurer)];
 }
 
 function cardsOfMonth(model: SheetModel, month: number, measurer: TextMeasurer): SheetPage[] {
   const grid = monthGrid(model, month, measurer);
   const name = model.words.monthName(month).officer;
-  const pointer = plainBlock(model.words.moreOnNextCard(name), LEGEND_BOLD, AREA, measurer);
+  const pointer = plainBlock(model.words.moreOnNextCard(name), LEGEND_BOLD, CARD_AREA, measurer);
   const wordsTop = grid.bottom + 1;
-  const footRoom = BOTTOM_MM - wordsTop - pointer.height - 1;
-  const foot = pageFoot(model, AREA, namesMarkers(model, month), footRoom, measurer);
-  const footTop = BOTTOM_MM - foot.height;
+  const footRoom = CARD_BOTTOM_MM - wordsTop - pointer.height - 1;
+  const foot = pageFoot(model, CARD_AREA, namesMarkers(model, month), footRoom, measurer);
+  const footTop = CARD_BOTTOM_MM - foot.height;
   const fresh = continuationTop(model, month, measurer);
-  const items = monthWords(model, month, AREA, measurer);
-  const statements = foot.leftOut.map((text) => plainBlock(text, LEGEND, AREA, measurer));
+  const items = monthWords(model, month, CARD_AREA, measurer);
+  const statements = foot.leftOut.map((text) => plainBlock(text, LEGEND, CARD_AREA, measurer));
   const { here, onward } = planCard(
     [...items, ...statements.map((block) => ({ short: block, full: block }))],
     footTop - wordsTop - 0.5,
@@ -68,82 +54,22 @@ function cardsOfMonth(model: SheetModel, month: number, measurer: TextMeasurer):
   const cards = following.length + 1;
   const ofMonth = (card: number): string => model.words.cardOf({ month: name, card, cards });
   return [
-    page(
+    cardPage(
       model,
       { kind: 'month-card', month, name },
-      [...grid.primitives, ...stack(hereRows, wordsTop), ...foot.draw(footTop)],
+      [...grid.primitives, ...stackedRows(hereRows, wordsTop), ...foot.draw(footTop)],
       measurer,
     ),
     ...following.map((rows, index) => {
       const head = continuationHead(model, month, ofMonth(index + 2), measurer);
-      return page(
+      return cardPage(
         model,
         { kind: 'continuation', month, name: ofMonth(index + 2) },
-        [...head, ...stack(rows, fresh), ...foot.draw(footTop)],
+        [...head, ...stackedRows(rows, fresh), ...foot.draw(footTop)],
         measurer,
       );
     }),
   ];
-}
-
-function undatedCards(model: SheetModel, measurer: TextMeasurer): SheetPage[] {
-  const blocks = undatedWords(model, AREA, measurer).map(({ full }) => full);
-  if (blocks.length === 0) return [];
-  const foot = pageFoot(model, AREA, false, FULL_FOOT_MM, measurer);
-  const footTop = BOTTOM_MM - foot.height;
-  const heading = model.words.noDateHeading(model.year);
-  const head = cardHead(model, null, heading, AREA, measurer);
-  const top = head.bottom + 4;
-  return flowBlocks(blocks, footTop - top - 2).map((rows) =>
-    page(
-      model,
-      { kind: 'continuation', month: null, name: heading },
-      [
-        ...head.primitives,
-        rule(LEFT_MM, RIGHT_MM, head.bottom + 1.5),
-        ...stack(rows, top),
-        ...foot.draw(footTop),
-      ],
-      measurer,
-    ),
-  );
-}
-
-function page(
-  model: SheetModel,
-  about: Pick<SheetPage, 'kind' | 'month' | 'name'>,
-  primitives: readonly Primitive[],
-  measurer: TextMeasurer,
-): SheetPage {
-  const withBar = [
-    ...primitives,
-    ...barDown(
-      model,
-      { x: BAR_DOWN_X_MM, top: BAR_DOWN_TOP_MM, textBaseline: BAR_DOWN_X_MM + 4.3 },
-      measurer,
-    ),
-  ];
-  return {
-    ...about,
-    width: CARD_WIDTH_MM,
-    height: CARD_HEIGHT_MM,
-    trim: null,
-    primitives: watermarked(
-      model,
-      withBar,
-      { x: LEFT_MM, y: 46, width: RIGHT_MM - LEFT_MM, height: 150 },
-      measurer,
-    ),
-  };
-}
-
-function stack(rows: readonly WordRow[], top: number): Primitive[] {
-  let y = top;
-  return rows.flatMap((row) => {
-    const drawn = row.draw(y);
-    y += row.height;
-    return drawn;
-  });
 }
 
 /** Dawn and dusk are spoken of where a marker's range touches the month. */
@@ -152,7 +78,7 @@ function namesMarkers(model: SheetModel, month: number): boolean {
 }
 
 function continuationTop(model: SheetModel, month: number, measurer: TextMeasurer): number {
-  return cardHead(model, month, holesOfMonth(model, month), AREA, measurer).bottom + 4;
+  return cardHead(model, month, holesOfMonth(model, month), CARD_AREA, measurer).bottom + 4;
 }
 
 function continuationHead(
@@ -161,7 +87,7 @@ function continuationHead(
   second: string,
   measurer: TextMeasurer,
 ): Primitive[] {
-  const head = cardHead(model, month, second, AREA, measurer);
+  const head = cardHead(model, month, second, CARD_AREA, measurer);
   return [...head.primitives, rule(LEFT_MM, RIGHT_MM, continuationTop(model, month, measurer) - 2.5)];
 }
 
@@ -172,7 +98,7 @@ function monthGrid(
   measurer: TextMeasurer,
 ): { primitives: Primitive[]; bottom: number } {
   const { words, year } = model;
-  const head = cardHead(model, month, holesOfMonth(model, month), AREA, measurer);
+  const head = cardHead(model, month, holesOfMonth(model, month), CARD_AREA, measurer);
   const gridTop = Math.max(46, head.bottom + 7.6);
   const firstWeekday = model.firstWeekday ?? 1;
   const lead = (weekdayOf(isoOf(year, month, 1)) - firstWeekday + 7) % 7;
@@ -222,7 +148,7 @@ function monthGrid(
   const key = barLegend(
     model,
     shown,
-    { ...AREA, top: bottom, moonDays: model.moonBegins.length > 0 },
+    { ...CARD_AREA, top: bottom, moonDays: model.moonBegins.length > 0 },
     measurer,
   );
   return { primitives: [...primitives, ...key.primitives], bottom: bottom + key.height };

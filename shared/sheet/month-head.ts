@@ -9,6 +9,9 @@ import { versionFigure } from './version-figure.js';
 import { LEGEND } from './word-block.js';
 
 export const MONTH_NAME: TextStyle = { role: 'month-name', sizePt: 40, weight: 700 };
+/** What names a card that is no month's, in two lines at most. */
+const CARD_HEADING: TextStyle = { role: 'legend', sizePt: 20, weight: 700 };
+const CARD_HEADING_LINES = 2;
 const MOON_DATE: TextStyle = { role: 'moon-date', sizePt: 16, weight: 700 };
 
 const FIGURE_BASELINE_MM = 29.2;
@@ -41,7 +44,10 @@ export function monthTitle(
   return { large, other };
 }
 
-/** Title, Moons and issue over a card; `second` is what stands under the title. Answers where it ends. */
+/**
+ * Title, Moons and issue over a card; `second` is what stands under the title, or is the title itself where the card is
+ * no month's. Answers where it ends.
+ */
 export function cardHead(
   model: SheetModel,
   month: number | null,
@@ -56,6 +62,8 @@ export function cardHead(
           .filter(({ date }) => date.startsWith(isoOf(model.year, month, 1).slice(0, 8)))
           .toSorted((a, b) => (a.date < b.date ? -1 : 1));
   const title = month === null ? null : monthTitle(model, month, NAME_WIDTH_MM, measurer);
+  const heading = month === null ? wrapText(second, NAME_WIDTH_MM, CARD_HEADING, measurer) : [];
+  const isHeading = heading.length > 0 && heading.length <= CARD_HEADING_LINES;
   const moonsLeft = area.left + NAME_WIDTH_MM + 1.5;
   const moonsRight = moonsLeft + moons.length * MOON_PITCH_MM;
   const figure = versionFigure(
@@ -67,6 +75,16 @@ export function cardHead(
     ...(title === null
       ? []
       : [textOnBaseline([title.large], { x: area.left, baseline: NAME_BASELINE_MM }, MONTH_NAME, measurer)]),
+    ...(isHeading
+      ? [
+          textBlock(
+            heading,
+            { x: area.left, top: SECOND_LINE_MM - heading.length * leadingMm(CARD_HEADING) },
+            CARD_HEADING,
+            measurer,
+          ),
+        ]
+      : []),
     ...figure.primitives,
   ];
   moons.forEach(({ phase, date }, index) => {
@@ -82,7 +100,7 @@ export function cardHead(
     );
   });
 
-  const under = [title?.other ?? '', second].filter((part) => part !== '').join(' · ');
+  const under = [title?.other ?? '', isHeading ? '' : second].filter((part) => part !== '').join(' · ');
   const moonWords = moons.length === 0 ? '' : model.words.moonPhases(moons.map(({ phase }) => phase));
   // The village's name comes first; the Moons speak for themselves where their words have no room beside it.
   const place = onOneLine(

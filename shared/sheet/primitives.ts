@@ -139,7 +139,8 @@ export type Primitive =
   | ScaleBarPrimitive
   | TextPrimitive;
 
-export type PageKind = 'month-card' | 'continuation' | 'tile' | 'legend';
+/** `words-card` lies beside the months' cards and is none of theirs. */
+export type PageKind = 'month-card' | 'continuation' | 'words-card' | 'tile' | 'legend';
 
 /** A laid-out page of paper of any kind. */
 export interface DrawnPage {

@@ -93,6 +93,12 @@ export interface SheetNotice {
   readonly expires: string;
 }
 
+/** Sentences about single entries, a line each, and which board they compare with. */
+export interface SheetChanges {
+  readonly title: string;
+  readonly lines: readonly string[];
+}
+
 export interface SheetModel {
   readonly layout: SheetLayout;
   readonly paper: 'A4';
@@ -119,8 +125,8 @@ export interface SheetModel {
   readonly contacts: { readonly weather: string; readonly agriculture: string };
   /** What the dates rest on; one statement a line. */
   readonly basis: readonly string[];
-  /** What it says otherwise than the board before it in the same year, a line each; left out for the year's first. */
-  readonly changes?: readonly string[];
+  /** What it says otherwise than the board before it in the same year; left out where that is nothing. */
+  readonly changes?: SheetChanges;
   readonly signedBy: string;
   readonly printDate: string;
   readonly words: SheetWords;

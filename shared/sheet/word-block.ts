@@ -144,16 +144,18 @@ export function smallBlock(
   return { short: small, full: small };
 }
 
-/** Plain lines without a tag. */
+/** Plain lines without a tag, with white ground of `afterMm` after them. */
 export function plainBlock(
   text: string,
   style: TextStyle,
   area: BlockArea,
   measurer: TextMeasurer,
+  afterMm = 0,
 ): WordBlock {
+  const lines = wrapText(text, area.right - area.left, style, measurer);
   return block(
-    wrapText(text, area.right - area.left, style, measurer).map((line) => ({
-      height: leadingMm(style),
+    lines.map((line, index) => ({
+      height: leadingMm(style) + (index === lines.length - 1 ? afterMm : 0),
       draw: (top) => [textBlock([line], { x: area.left, top }, style, measurer)],
     })),
   );

@@ -98,8 +98,12 @@ export function legendPages(model: SheetModel, measurer: TextMeasurer): SheetPag
 }
 
 /** Whoever took the old board down finds here what the new one says otherwise. */
-function changeBlocks({ changes = [] }: SheetModel, measurer: TextMeasurer): WordBlock[] {
-  return changes.map((line, index) => plainBlock(line, index === 0 ? LEGEND_BOLD : LEGEND, AREA, measurer));
+function changeBlocks({ changes }: SheetModel, measurer: TextMeasurer): WordBlock[] {
+  if (changes === undefined) return [];
+  return [
+    plainBlock(changes.title, LEGEND_BOLD, AREA, measurer),
+    ...changes.lines.map((line) => plainBlock(line, LEGEND, AREA, measurer)),
+  ];
 }
 
 function columnHeads(model: SheetModel, top: number, measurer: TextMeasurer): Primitive[] {

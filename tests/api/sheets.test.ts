@@ -11,6 +11,7 @@ import {
   publishDraft,
   submit,
   takeBack,
+  versionPath,
   type Village,
 } from '#tests/support/calendar-api.js';
 import { addConsent } from '#tests/support/consent-api.js';
@@ -209,6 +210,51 @@ describe('the path', () => {
     const stranger = await api.signIn('officer2');
     await stranger.get(pdfPath(1)).expect(404);
   });
+});
+
+describe('a board that is mended inside its year', () => {
+  it.each(['month-cards', 'year-board'])(
+    'says what changed as %s, and nothing of what it may not show',
+    async (layout) => {
+      const said = allWords(pagesOf(await preview(staff, mendedPath(`?layout=${layout}`)))).replaceAll(
+        '\n',
+        ' ',
+      );
+      expect(said).toContain('Changed since 2030-1');
+      expect(said).toContain('Mend the weir: new');
+      expect(said).toContain('Burn the stubble: taken off the board');
+      expect(said).not.toContain('Water the young trees');
+    },
+  );
+
+  it('has a card of its own for it, after the months, in the file as on the screen', async () => {
+    const pages = pagesOf(await preview(staff, mendedPath()));
+    expect(pages.at(-1)).toMatchObject({ kind: 'words-card', month: null, name: 'Changed since 2030-1' });
+    const file = await pdf(staff, mendedPath('', '.pdf'));
+    expect(readPdfPages(file)).toHaveLength(pages.length);
+    expect(readPdfText(file).replace(/\s+/gu, ' ')).toContain('Burn the stubble: taken off the board');
+  });
+
+  let mended: Version;
+  const mendedPath = (query = '', ending = '') => `${versionPath(mended)}/sheet${ending}${query}`;
+  /** One entry comes, one goes, and one becomes a belief, which is not printed without its giver's yes. */
+  beforeAll(async () => {
+    const { officer } = village;
+    const { id } = await beginCalendar(village, 2030);
+    await addEntry(officer, id, { titleOfficer: 'Sow long millet' });
+    const gone = await addEntry(officer, id, { titleOfficer: 'Burn the stubble' });
+    const held = await addEntry(officer, id, { titleOfficer: 'Water the young trees' });
+    const first = await publishDraft(village, id);
+    const before = allWords(pagesOf(await preview(staff, `${versionPath(first)}/sheet`)));
+    expect(before).toContain('Water the young trees');
+    await addEntry(officer, id, { titleOfficer: 'Mend the weir' });
+    await officer.delete(`/api/calendars/${id}/entries/${gone.id}`).expect(204);
+    const content = { ...held.content, kind: 'belief' as const };
+    await officer
+      .put(`/api/calendars/${id}/entries/${held.id}`, { content, version: held.version })
+      .expect(200);
+    mended = await publishDraft(village, id);
+  }, 60_000);
 });
 
 describe('a recalled version', () => {

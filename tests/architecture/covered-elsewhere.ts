@@ -9,6 +9,7 @@ export const coveredElsewhere: Readonly<Record<string, string>> = {
   'shared/calendar/day-grounds.ts': 'tests/unit/shared/calendar/why-moved.test.ts',
   'shared/sheet/bar-legend.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/board-names.ts': 'tests/unit/shared/sheet/year-board.test.ts',
+  'shared/sheet/card-page.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/day-row.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/month-head.ts': 'tests/unit/shared/sheet/month-card.test.ts',
   'shared/sheet/month-words.ts': 'tests/unit/shared/sheet/month-card.test.ts',

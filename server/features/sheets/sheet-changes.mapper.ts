@@ -2,6 +2,7 @@ import { compareEntries } from '#shared/calendar/comparison.js';
 import { boardOf } from '#shared/calendar/variants.js';
 import type { VersionEntryBody } from '#shared/contracts/versions.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
+import type { SheetChanges } from '#shared/sheet/sheet-model.js';
 import type { SheetWords } from '#shared/sheet/sheet-words.js';
 import type { Translate } from '../../print/translator.js';
 
@@ -22,12 +23,12 @@ const OFF_THE_BOARD = new Set([
   'dates.warnings',
 ]);
 
-/** What a mended board says otherwise than the one before it in the same year, a line each; none where it says the same. */
+/** What a mended board says otherwise than the one before it in the same year; undefined where it says the same. */
 export function toSheetChanges(
   before: SheetBefore,
   entries: readonly VersionEntryBody[],
   { files, words }: { files: Translate; words: SheetWords },
-): string[] {
+): SheetChanges | undefined {
   const range = (body: VersionEntryBody) => {
     const { window } = boardOf(body);
     return window === null ? files('sheet.changes.noDays') : words.range(window.bestFrom, window.bestTo);
@@ -52,5 +53,7 @@ export function toSheetChanges(
         : [files('sheet.changes.words', { title })];
     },
   );
-  return lines.length === 0 ? [] : [files('sheet.changes.title', { label: before.label }), ...lines];
+  return lines.length === 0
+    ? undefined
+    : { title: files('sheet.changes.title', { label: before.label }), lines };
 }

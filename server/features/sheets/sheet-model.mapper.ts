@@ -41,8 +41,7 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
   const print = translatorFor(language, 'print');
   const sky = translatorFor(language, 'sky');
   const words = sheetWords({ translate: print, language, year });
-  const changes =
-    facts.before === undefined ? [] : toSheetChanges(facts.before, facts.entries, { files, words });
+  const changes = facts.before && toSheetChanges(facts.before, facts.entries, { files, words });
   return {
     layout,
     paper,
@@ -60,7 +59,7 @@ export function toSheetModel(facts: SheetFacts, { layout, paper }: SheetQuery): 
     moonBegins: moonBeginsOf(header),
     contacts: { weather: header.weatherContact, agriculture: header.agricultureContact },
     basis: [basisOf(header, files)],
-    ...(changes.length > 0 && { changes }),
+    ...(changes && { changes }),
     ...(facts.notices && { notices: facts.notices.map(toSheetNotice) }),
     signedBy: listOf(facts.signerNames, language),
     printDate: facts.printDate,

@@ -1,5 +1,5 @@
 import type { SheetPreview, SheetQuery } from '#shared/contracts/sheets.js';
-import type { Signature } from '#shared/contracts/versions.js';
+import type { Signature, VersionEntryBody } from '#shared/contracts/versions.js';
 import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
 import type { SheetModel } from '#shared/sheet/sheet-model.js';
 import type { Actor } from '../../http/actor.js';
@@ -68,19 +68,29 @@ export class SheetsService {
         signerNames: signerNames(signatures),
         printDate,
         notices: await this.weather.noticesOn(actor.communityId, printDate),
-        before: label === null ? undefined : await this.before(actor, calendarId, Number(number)),
+        before: label === null ? undefined : await this.before(actor, calendarId, Number(number), entries),
       },
       query,
     );
   }
 
-  /** The board that hung before, as far as it may still be printed. */
-  private async before(actor: Actor, calendarId: string, number: number): Promise<SheetBefore | undefined> {
+  /**
+   * The board that hung before, as far as it may still be printed. What stands in this version, too, but may not be
+   * printed of it was not taken off: the board keeps silent about it.
+   */
+  private async before(
+    actor: Actor,
+    calendarId: string,
+    number: number,
+    printed: readonly VersionEntryBody[],
+  ): Promise<SheetBefore | undefined> {
     const versions = await this.versions.list(actor, calendarId);
     const older = versions.find((version) => version.label !== null && version.number < number);
     if (older === undefined || older.label === null) return undefined;
     const { entries } = await this.contents.readForBoard(actor, calendarId, String(older.number));
-    return { label: older.label, entries };
+    const held = await this.contents.idsIn(actor, calendarId, number);
+    for (const { entryId } of printed) held.delete(entryId);
+    return { label: older.label, entries: entries.filter(({ entryId }) => !held.has(entryId)) };
   }
 }
 

@@ -144,6 +144,14 @@ export class FrozenContentService {
     return { header: cutHeader(seen.header, entries).header, entries, open, givers };
   }
 
+  /** Which entries a version holds, those that nobody may be shown as well: for rules, never for an answer. */
+  async idsIn(actor: Actor, calendarId: string, number: number): Promise<Set<string>> {
+    const { manager } = this.dataSource;
+    const version = await visibleVersion(manager, actor, calendarId, number);
+    const { entries } = await frozenContent(manager, version);
+    return new Set(entries.map(({ entryId }) => entryId));
+  }
+
   private async draft(manager: EntityManager, actor: Actor, calendarId: string): Promise<CalendarContent> {
     const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
     const whole = await this.draftContent(manager, calendar, this.clock.now());

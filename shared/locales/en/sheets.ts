@@ -5,7 +5,8 @@ export const texts = {
   what: 'What to print',
   layout: {
     'month-cards': 'Month cards',
-    'month-cards-note': '12 A4 sheets, no joins; more where the words need room',
+    'month-cards-note':
+      '12 A4 sheets, no joins; more where the words need room, and a card of what changed since the version before',
     'year-board': 'Year board',
     'year-board-note': 'A4 sheets to glue, about 762 × 536 mm',
   },
@@ -18,6 +19,7 @@ export const texts = {
   paper: 'Paper and ink',
   sheets_one: '{{count}} sheet of A4, black only.',
   sheets_other: '{{count}} sheets of A4, black only.',
+  beside: 'Besides the months:',
   fileSize: 'The file is about {{size}} MB.',
   missingLetters:
     'These letters are in none of the printed typefaces and would print as empty boxes: {{letters}}. Write them another way first.',
@@ -28,6 +30,7 @@ export const texts = {
   pageTitle: {
     'month-card': '{{name}}',
     continuation: '{{name}}, more words',
+    'words-card': '{{name}}',
     tile: 'Tile {{name}}',
     legend: '{{name}}',
   },

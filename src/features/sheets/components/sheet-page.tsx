@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useParams, useSearchParams } from 'react-router-dom';
 import { SHEET_LAYOUTS, type SheetLayout } from '#shared/contracts/sheets.js';
+import type { SheetPage } from '#shared/sheet/primitives.js';
 import type { VersionSummary } from '#shared/contracts/versions.js';
 import { calendarQuery, versionsQuery } from '#src/lib/calendar-queries.js';
 import { useRoles } from '#src/lib/community.js';
@@ -143,6 +144,7 @@ function SheetDesk({
           {sheet.data && (
             <Board title={t('paper')}>
               <p>{t('sheets', { count: sheet.data.pages.length })}</p>
+              <CardsBeside pages={sheet.data.pages} />
               {sheet.data.fileBytes !== null && (
                 <p>{t('fileSize', { size: (sheet.data.fileBytes / 1_000_000).toFixed(1) })}</p>
               )}
@@ -163,6 +165,23 @@ function SheetDesk({
           <WallSteps layout={layout} />
         </div>
       </div>
+    </>
+  );
+}
+
+/** The cards that are no month's, so that nobody looks for them only when they come out of the printer. */
+function CardsBeside({ pages }: { pages: readonly SheetPage[] }) {
+  const { t } = useTranslation('sheets');
+  const names = pages.filter(({ kind }) => kind === 'words-card').map(({ name }) => name);
+  if (names.length === 0) return null;
+  return (
+    <>
+      <p>{t('beside')}</p>
+      <ul className="list-disc ps-5">
+        {names.map((name) => (
+          <li key={name}>{name}</li>
+        ))}
+      </ul>
     </>
   );
 }

@@ -205,10 +205,10 @@ describe('the year board', () => {
   });
 
   it('names on the sheet beside it what a mended board says otherwise', () => {
-    const changes = ['Changed since 2027-1', 'Sow: best 16–30 June; before, 14–30 June'];
+    const changes = { title: 'Changed since 2027-1', lines: ['Sow: best 16–30 June; before, 14–30 June'] };
     const pages = yearBoard(upperTazimel({ layout: 'year-board', changes }), fontMeasurer);
     const legend = allWords(pages.filter(({ kind }) => kind === 'legend'));
-    for (const line of changes) expect(legend).toContain(line);
+    for (const line of [changes.title, ...changes.lines]) expect(legend).toContain(line);
     expect(allWords(tilesOf(pages))).not.toContain('Changed since');
   });
 });

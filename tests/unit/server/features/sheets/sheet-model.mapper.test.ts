@@ -332,10 +332,10 @@ describe('the rest of the sheet', () => {
     ];
     const gone = body({ titleOfficer: 'Burn' });
     const before = { label: '2027-1', entries: [sow, weed, store, gone] };
-    const { changes = [] } = model(entries, { label: '2027-2', before });
+    const { changes } = model(entries, { label: '2027-2', before });
     // Days keep to their months with spaces that do not break.
-    expect(changes.map((line) => line.replaceAll('\u00a0', ' '))).toEqual([
-      'Changed since 2027-1',
+    expect(changes?.title).toBe('Changed since 2027-1');
+    expect(changes?.lines.map((line) => line.replaceAll('\u00a0', ' '))).toEqual([
       'Sow: best 16 to 30 June; before, 14 to 30 June',
       'Weed: other words or signs, same days',
       'Fish: new',
