@@ -32,7 +32,7 @@ export const StripRowFields = memo(function StripRowFields({
     <>
       <th scope="row">
         <input
-          className="inp min-w-56"
+          className="inp min-w-72"
           aria-label={t('titleOf', { title: name })}
           value={title}
           onChange={(event) => {

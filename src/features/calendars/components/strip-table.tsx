@@ -28,7 +28,11 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
   const part = useShownPart(entries);
   const days = ({ dates: found }: ShownEntry) =>
     found?.window ? (
-      DAYS.map((day) => <td key={day}>{found.window && dates.day(found.window[day], 'short')}</td>)
+      DAYS.map((day) => (
+        <td key={day} className="whitespace-nowrap">
+          {found.window && dates.day(found.window[day], 'short')}
+        </td>
+      ))
     ) : (
       <td colSpan={DAYS.length}>{t('days.none', { year })}</td>
     );
@@ -68,7 +72,7 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
                   {ways && <td colSpan={OFFSETS.length + 1} />}
                 </>
               )}
-              <td>{words.leadAlone(entry.content, markers)}</td>
+              <td className="min-w-56">{words.leadAlone(entry.content, markers)}</td>
               {days(entry)}
             </tr>
           ))}
