@@ -1,4 +1,4 @@
-import type { ImportColumn, TableLine } from '#shared/contracts/imports.js';
+import { RECORD_COLUMNS, type ImportColumn, type TableLine } from '#shared/contracts/imports.js';
 import { csvText } from '#shared/kernel/csv.js';
 
 /** Columns of the empty table: what a person would write by hand. */
@@ -22,37 +22,7 @@ export const TEMPLATE_COLUMNS = [
   'caution',
   'notes',
   'giver',
-  'operation',
-  'ownOperation',
-  'variety',
-  'varietyFromDays',
-  'varietyToDays',
-  'land',
-  'readyDays',
-  'graceDays',
-  'repeats',
-  'everyYears',
-  'repeatRule',
-  'signs',
-  'signsNeeded',
-  'mustHaveSign',
-  'responsible',
-  'helpers',
-  'decides',
-  'owns',
-  'inputs',
-  'ifEarly',
-  'ifLaterStill',
-  'stopDate',
-  'stopSource',
-  'askWhom',
-  'confidence',
-  'confidenceBy',
-  'basis',
-  'sinceYear',
-  'heardWhere',
-  'heardDay',
-  'heardLanguage',
+  ...RECORD_COLUMNS,
 ] as const satisfies readonly ImportColumn[];
 
 export type ExampleLine = Readonly<Partial<Record<ImportColumn, string>>>;
