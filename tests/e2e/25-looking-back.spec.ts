@@ -1,11 +1,14 @@
 import { execFileSync } from 'node:child_process';
 import type { Page } from '@playwright/test';
+import type { Calendar } from '#shared/contracts/calendars.js';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import { putIn, send } from '#tests/support/officer-pair.js';
 
 /*
  * At the end of the season: the officer types when sowing was really done, an elder says what the year taught, the officer
- * decides; next year's draft shows the decision as a task, and it is ticked off. The year prints on one page.
+ * decides; next year's draft shows the decision as a task, and it is ticked off. The year prints on one page. A
+ * year in whose draft something was written since says at its head how much stands there alone.
  */
 test.use({ viewport: { width: 320, height: 700 }, hasTouch: true });
 test.describe.configure({ mode: 'serial' });
@@ -89,4 +92,24 @@ test('what the officer decides is a task of the next year’s draft, and is tick
   await expect(page.getByRole('heading', { name: 'From looking back at 2027' })).toBeVisible();
   await page.getByRole('button', { name: /^Not done yet: Do it later/u }).click();
   await expect(page.getByText('Decided by Beyno.')).toBeVisible();
+});
+
+test('a year says by which calendar it went, and how much of it stands in the draft alone', async ({
+  page,
+}) => {
+  await signIn(page, 'officer');
+  const { items } = await send<{ items: Calendar[] }>(page, 'GET', '/api/calendars');
+  const before = items.find(({ year }) => year === 2026)?.id ?? '';
+  await page.goto(`/calendars/${before}/season-review`);
+  await expect(shown(page).getByText(/By the calendar 2026-2$/u)).toBeVisible();
+  await putIn(page, before, 'Clear the spring path');
+  await page.reload();
+  await expect(
+    shown(page).getByText(/By the calendar 2026-2, and 1 entry that stands in the draft alone$/u),
+  ).toBeVisible();
+  await shown(page).getByText('Clear the spring path').first().click();
+  await expect(
+    shown(page).getByText(/\(in the draft alone, not in the published calendar\)$/u),
+  ).toBeVisible();
+  await expectNoSidewaysScroll(page);
 });
