@@ -29,7 +29,7 @@ const MADE_UP: ColumnTexts = {
         when: 'farit dag vo 1',
         bestFromDays: '19',
       },
-      three: { titleOfficer: 'Zuy: klozol', kind: 'hus', bestFrom: '20 Nuvu', bestTo: 'Dezu 1' },
+      three: { titleOfficer: 'Zuy: klozol', kind: 'hus', bestFrom: '20 Nuvu', bestTo: 'Dezu dekad 1' },
       four: { titleOfficer: 'Zuy: hakol', kind: 'fel', when: 'Zuj sudo ab 21:00', bestFromDays: '0' },
     },
   },
