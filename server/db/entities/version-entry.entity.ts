@@ -45,4 +45,8 @@ export class VersionEntryEntity {
 
   @Column({ ...sha256Column })
   hash!: string;
+
+  /** The hash under which its answers are kept where it says the same in other words of the village; null for its own. */
+  @Column({ name: 'answers_to', ...sha256Column, nullable: true })
+  answersTo!: string | null;
 }

@@ -29,6 +29,7 @@ import { WordLists1799300000000 } from './1799300000000-word-lists.js';
 import { LocalMonths1799750000000 } from './1799750000000-local-months.js';
 import { OneKindOfKeys1799600000000 } from './1799600000000-one-kind-of-keys.js';
 import { OlderEntries1799770000000 } from './1799770000000-older-entries.js';
+import { AnswersAcrossWords1799780000000 } from './1799780000000-answers-across-words.js';
 import { NoNames1799760000000 } from './1799760000000-no-names.js';
 import { OwnSightings1799300100000 } from './1799300100000-own-sightings.js';
 import { SeasonReviews1799400000000 } from './1799400000000-season-reviews.js';
@@ -69,4 +70,5 @@ export const MIGRATIONS = [
   LocalMonths1799750000000,
   NoNames1799760000000,
   OlderEntries1799770000000,
+  AnswersAcrossWords1799780000000,
 ];

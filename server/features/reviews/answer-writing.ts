@@ -11,6 +11,7 @@ import type { Actor } from '../../http/actor.js';
 import { conflict, invalidField } from '../../http/app-error.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import { recordAudit } from '../audit/audit.service.js';
+import { answersHashOf } from '../versions/answers-across-words.service.js';
 import type { Hand } from './answer-hand.js';
 import { elderIdsOf } from './reviews.repository.js';
 
@@ -56,7 +57,7 @@ export async function writeAnswer(
     id,
     calendarId: version.calendarId,
     entryId: entry.entryId,
-    entryHash: entry.hash,
+    entryHash: answersHashOf(entry),
     elderId,
     answer: word.answer,
     note: word.note,
@@ -120,7 +121,11 @@ export async function expectUnsigned(
 }
 
 export async function findAnswer({ manager, entry }: Asked, elderId: string): Promise<AnswerEntity | null> {
-  return manager.findOneBy(AnswerEntity, { entryId: entry.entryId, entryHash: entry.hash, elderId });
+  return manager.findOneBy(AnswerEntity, {
+    entryId: entry.entryId,
+    entryHash: answersHashOf(entry),
+    elderId,
+  });
 }
 
 export async function recordAnswer(

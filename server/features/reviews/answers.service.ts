@@ -1,4 +1,10 @@
-import { answeredCount, entryOutcome, type AnswerFact, type ReviewState } from '#shared/calendar/sign-off.js';
+import {
+  answeredCount,
+  entryOutcome,
+  type AnswerFact,
+  type ReviewedEntry,
+  type ReviewState,
+} from '#shared/calendar/sign-off.js';
 import type {
   Answer,
   AnswerInput,
@@ -22,6 +28,7 @@ import type { ProofsService } from '../attachments/proofs.service.js';
 import type { CardSignInService } from '../cards/card-sign-in.service.js';
 import { lockCalendar } from '../calendars/draft.service.js';
 import { personNames } from '../people/person-names.service.js';
+import { answersHashes } from '../versions/answers-across-words.service.js';
 import { frozenContent, frozenEntry, visibleVersion } from '../versions/frozen-content.service.js';
 import { answersOf, readReviewState, reviewedVersion } from '../versions/review-state.service.js';
 import { seenOfVersion, thingOf } from '../versions/seen-content.service.js';
@@ -59,7 +66,10 @@ export class AnswersService {
     const version = await visibleVersion(manager, actor, calendarId, number);
     const review = await readReviewState(manager, version);
     const seen = await this.seenEntries(manager, actor, version);
-    const frozen = new Set(seen.map(({ entryId, hash }) => `${entryId} ${hash}`));
+    const hashes = await answersHashes(manager, version.id);
+    const reviewed = seen.map(({ entryId, hash }) => ({ entryId, hash: hashes.get(entryId) ?? hash }));
+    const frozen = new Set(reviewed.map(({ entryId, hash }) => `${entryId} ${hash}`));
+    const ownHash = new Map(seen.map(({ entryId, hash }) => [entryId, hash]));
     const given = await answersOf(manager, calendarId);
     const counted = new Set(review.answers.map(keyOf));
     const rows = given.filter(
@@ -73,14 +83,22 @@ export class AnswersService {
     ]);
     const evidence = await evidenceOf(manager, await viewerOf(manager, actor, this.clock.now()), rows);
     return {
-      items: rows.map((row) => toAnswer(row, names, actor.person.id, evidence(row))),
+      items: rows.map((row) => ({
+        ...toAnswer(row, names, actor.person.id, evidence(row)),
+        entryHash: ownHash.get(row.entryId) ?? row.entryHash,
+      })),
       nextCursor: null,
       outcomes: seen.map(({ entryId, hash, variants = [] }) => ({
         entryId,
-        outcome: entryOutcome({ entryId, hash }, review.answers, review.writerIds, variants.length > 0),
+        outcome: entryOutcome(
+          { entryId, hash: hashes.get(entryId) ?? hash },
+          review.answers,
+          review.writerIds,
+          variants.length > 0,
+        ),
       })),
       progress: progressOf(review, elderIds, names).map((elder) =>
-        elder.elderId === actor.person.id ? ownProgress(elder, seen, review) : elder,
+        elder.elderId === actor.person.id ? ownProgress(elder, reviewed, review) : elder,
       ),
     };
   }
@@ -108,7 +126,7 @@ export class AnswersService {
     if (hand.proof === 'pin') await this.pins.provePin(actor.communityId, hand.elderId, pin ?? '');
     return this.inReview(actor, calendarId, number, entryId, async (asked) => {
       const row = await writeAnswer(asked, actor, this.clock.now(), hand, input);
-      return this.describe(asked.manager, actor, row);
+      return this.describe(asked, actor, row);
     });
   }
 
@@ -135,7 +153,7 @@ export class AnswersService {
         const row = await writeAnswer(asked, actor, this.clock.now(), hand, input, (answerId) =>
           attach(manager, { ...about, subjectType: 'answer', subjectId: answerId }),
         );
-        return this.describe(manager, actor, row);
+        return this.describe(asked, actor, row);
       }),
     );
   }
@@ -161,7 +179,7 @@ export class AnswersService {
         await asked.manager.update(AnswerEntity, { id: row.id }, { letStand: true });
         await recordAnswer(asked, actor, this.clock.now(), 'difference-let-stand', {});
       }
-      return this.describe(asked.manager, actor, row);
+      return this.describe(asked, actor, row);
     });
   }
 
@@ -188,10 +206,10 @@ export class AnswersService {
     return sight.appearance(thing) === 'full';
   }
 
-  private async describe(manager: EntityManager, actor: Actor, row: AnswerEntity): Promise<Answer> {
+  private async describe({ manager, entry }: Asked, actor: Actor, row: AnswerEntity): Promise<Answer> {
     const names = await personNames(manager, [row.elderId, row.recordedBy]);
     const evidence = await evidenceOf(manager, await viewerOf(manager, actor, this.clock.now()), [row]);
-    return toAnswer(row, names, actor.person.id, evidence(row));
+    return { ...toAnswer(row, names, actor.person.id, evidence(row)), entryHash: entry.hash };
   }
 }
 
@@ -202,7 +220,7 @@ function keyOf({ entryId, entryHash, elderId }: Omit<AnswerFact, 'answer' | 'let
 /** One's own count goes over everything that one sees, also what its people keep. */
 function ownProgress(
   elder: ElderProgress,
-  seen: readonly VersionEntry[],
+  seen: readonly ReviewedEntry[],
   { answers }: ReviewState,
 ): ElderProgress {
   return { ...elder, answered: answeredCount(elder.elderId, seen, answers), of: seen.length };

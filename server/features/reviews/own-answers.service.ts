@@ -82,7 +82,7 @@ export class OwnAnswersService {
       }
       const row = manager.create(AnswerEntity, {
         id: before?.id ?? randomUUID(),
-        ...{ calendarId, entryId, entryHash: entry.hash, elderId: actor.person.id },
+        ...{ calendarId, entryId, entryHash: entry.answersHash, elderId: actor.person.id },
         ...{
           answer,
           note,
@@ -148,7 +148,11 @@ export class OwnAnswersService {
     calendarId: string,
     number: number,
     entryId: string,
-    work: (manager: EntityManager, entry: { hash: string }, before: AnswerEntity | undefined) => Promise<T>,
+    work: (
+      manager: EntityManager,
+      entry: { answersHash: string },
+      before: AnswerEntity | undefined,
+    ) => Promise<T>,
   ): Promise<T> {
     return inTransaction(this.dataSource, async (manager) => {
       await lockCalendar(manager, calendarId);
@@ -198,12 +202,12 @@ export async function countOwn(
 async function ownAnswers(
   manager: EntityManager,
   elderId: string,
-  entries: readonly { entryId: string; hash: string }[],
+  entries: readonly { entryId: string; answersHash: string }[],
 ): Promise<Map<string, AnswerEntity>> {
   if (entries.length === 0) return new Map();
   const rows = await manager.findBy(AnswerEntity, {
     elderId,
-    entryHash: In(entries.map(({ hash }) => hash)),
+    entryHash: In(entries.map(({ answersHash }) => answersHash)),
   });
   return new Map(rows.map((row) => [row.entryId, row]));
 }

@@ -7,6 +7,7 @@ import { VersionEntryEntity } from '../../db/entities/version-entry.entity.js';
 import { keptEntryIds } from '../../policy/entry-sight.js';
 import type { Shared } from '../../policy/policy.js';
 import { sharedById } from '../../policy/sharing.repository.js';
+import { answersHashOf } from './answers-across-words.service.js';
 import { thingOf } from './seen-content.service.js';
 import { toVersionEntry } from './versions.mapper.js';
 import { frozenEntries } from './versions.repository.js';
@@ -29,11 +30,12 @@ export async function settleKeptEntries(
   const shared = await sharedById(manager, 'entry', [...kept]);
   const drafts = await manager.findBy(EntryEntity, { id: In([...kept]) });
   const writers = new Map(drafts.map(({ id, updatedBy }) => [id, updatedBy]));
-  for (const { id, entryId, hash } of rows) {
+  for (const row of rows) {
+    const { id, entryId } = row;
     if (!kept.has(entryId)) continue;
     const own = shared.get(entryId);
     const ownPeople = new Set(own === undefined ? [] : lonePeople(own));
-    const entry = { entryId, hash, writerId: writers.get(entryId) ?? '', ownPeople };
+    const entry = { entryId, hash: answersHashOf(row), writerId: writers.get(entryId) ?? '', ownPeople };
     if (!keptEntryStands(entry, answers)) await manager.update(VersionEntryEntity, { id }, { stands: false });
   }
 }

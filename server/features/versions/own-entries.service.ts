@@ -5,6 +5,7 @@ import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { entrySight } from '../../policy/entry-sight.js';
 import { sharedById } from '../../policy/sharing.repository.js';
 import type { Viewer } from '../../policy/viewer.js';
+import { answersHashes } from './answers-across-words.service.js';
 import { frozenContent } from './frozen-content.service.js';
 import { lonePeople } from './kept-entries.service.js';
 import { cutHeader, seenOfVersion, thingOf } from './seen-content.service.js';
@@ -12,7 +13,12 @@ import { cutHeader, seenOfVersion, thingOf } from './seen-content.service.js';
 /** What of a submission waits for the word of those who keep it, and the parts of its header that these entries need. */
 export interface OwnEntries {
   header: VersionHeader;
-  entries: VersionEntry[];
+  entries: OwnEntry[];
+}
+
+interface OwnEntry extends VersionEntry {
+  /** The hash under which its answers are kept. */
+  answersHash: string;
 }
 
 /**
@@ -33,7 +39,10 @@ export async function ownEntriesOf(
     viewer,
     kept.map(({ entryId }) => entryId),
   );
-  const entries = kept.filter(({ entryId }) => !written.has(entryId));
+  const hashes = await answersHashes(manager, version.id);
+  const entries = kept
+    .filter(({ entryId }) => !written.has(entryId))
+    .map((entry) => ({ ...entry, answersHash: hashes.get(entry.entryId) ?? entry.hash }));
   return { header: cutHeader(seen.header, entries).header, entries };
 }
 

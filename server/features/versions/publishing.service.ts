@@ -19,6 +19,7 @@ import { viewerOf } from '../../policy/viewer.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { countOnce } from '../calendars/count-once.service.js';
 import { draftWriterIds, forgetContributions, lockCalendar } from '../calendars/draft.service.js';
+import { answersCarried } from './answers-across-words.service.js';
 import type { FrozenContentService } from './frozen-content.service.js';
 import { settleKeptEntries } from './kept-entries.service.js';
 import { thingOf } from './seen-content.service.js';
@@ -59,6 +60,7 @@ export class PublishingService {
     const variants = entries.flatMap(({ entryId, variants: beside = [] }) =>
       beside.map((variant) => ({ ...variant, entryId })),
     );
+    const answersTo = await answersCarried(manager, calendarId, entries);
     const sealed = seal(header, entries, variants, await earlierSeals(manager, calendarId));
     const row = manager.create(CalendarVersionEntity, {
       id: randomUUID(),
@@ -81,7 +83,7 @@ export class PublishingService {
       publishedAt: null,
     });
     await manager.insert(CalendarVersionEntity, row);
-    await insertEntries(manager, row.id, sealed.entries);
+    await insertEntries(manager, row.id, sealed.entries, answersTo);
     for (const variant of sealed.variants) {
       await manager.insert(VersionVariantEntity, { id: randomUUID(), versionId: row.id, ...variant });
     }
@@ -237,8 +239,13 @@ async function insertEntries(
   manager: EntityManager,
   versionId: string,
   entries: readonly SealedEntry[],
+  answersTo: ReadonlyMap<string, string>,
 ): Promise<void> {
-  const rows = entries.map((entry, position) => ({ id: randomUUID(), versionId, position, ...entry }));
+  const rows = entries.map((entry, position) => {
+    const given = answersTo.get(entry.entryId);
+    const carried = given === undefined || given === entry.hash ? null : given;
+    return { id: randomUUID(), versionId, position, ...entry, answersTo: carried };
+  });
   for (let start = 0; start < rows.length; start += ENTRIES_PER_STATEMENT) {
     await manager.insert(VersionEntryEntity, rows.slice(start, start + ENTRIES_PER_STATEMENT));
   }

@@ -5,6 +5,7 @@ import { AnswerEntity } from '../../db/entities/answer.entity.js';
 import type { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { keptEntryIds } from '../../policy/entry-sight.js';
 import { conflict, notFound } from '../../http/app-error.js';
+import { answersHashOf } from './answers-across-words.service.js';
 import { thingOf } from './seen-content.service.js';
 import { toVersionEntry } from './versions.mapper.js';
 import { findVersion, frozenEntries, signaturesOf } from './versions.repository.js';
@@ -38,13 +39,13 @@ export function answersOf(manager: EntityManager, calendarId: string): Promise<A
   );
 }
 
-/** The frozen entries with their hashes, and which of them are kept by their people. */
+/** The frozen entries with the hashes of their answers, and which of them are kept by their people. */
 async function frozenThings(
   manager: EntityManager,
   versionId: string,
 ): Promise<{ entryId: string; hash: string; isKept: boolean }[]> {
   const rows = await frozenEntries(manager, versionId);
-  const things = rows.map((row) => ({ hash: row.hash, ...thingOf(toVersionEntry(row)) }));
+  const things = rows.map((row) => ({ hash: answersHashOf(row), ...thingOf(toVersionEntry(row)) }));
   const kept = await keptEntryIds(manager, things);
   return things.map(({ entryId, hash }) => ({ entryId, hash, isKept: kept.has(entryId) }));
 }

@@ -3,8 +3,8 @@ export const texts = {
   title: 'Words of this village',
   lead: 'What the village calls things. Drafts follow at once; versions keep the words of the day on which they were frozen.',
   asks: {
-    kinds: 'Where a word changes, elders are asked again about the entries that use it.',
-    operations: 'Where a word changes, elders are asked again about the entries that use it.',
+    kinds: 'For a new word alone elders are not asked again: the kind and its rules stay.',
+    operations: 'For a new word alone elders are not asked again: the work and its rules stay.',
     crops:
       'Where a crop is called otherwise, elders are asked again about the entries that follow: nothing but its name says what is grown.',
   },
@@ -62,8 +62,8 @@ export const texts = {
         'Once this is saved, every entry of a draft whose crop is just “{{before}}” says “{{now}}”. Where more is written there, it stays as it is. Versions keep “{{before}}”.',
     },
     asks: {
-      kinds: 'With the next submission elders are asked again about these entries.',
-      operations: 'With the next submission elders are asked again about these entries.',
+      kinds: 'Elders are not asked again for that: what they said to these entries stands.',
+      operations: 'Elders are not asked again for that: what they said to these entries stands.',
       crops: 'With the next submission elders are asked again about these entries.',
     },
     likeHint: 'Its rules are that one’s for good. What belongs to belief begins with the elders.',

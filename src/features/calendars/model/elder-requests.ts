@@ -1,7 +1,7 @@
 import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { Answer } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
-import { sameContent } from './entry-draft.js';
+import { sameForElders } from './entry-draft.js';
 
 export interface ElderRequest {
   answer: Answer;
@@ -30,7 +30,7 @@ export function answersByEntry(
   for (const frozen of version.entries) {
     const own = answers.filter((one) => one.entryId === frozen.entryId && one.entryHash === frozen.hash);
     const present = draftContents.get(frozen.entryId);
-    const changedSince = present !== undefined && !sameContent(frozen.content, present);
+    const changedSince = present !== undefined && !sameForElders(frozen.content, present);
     const requests = isOpen ? own.filter(asksForSomething).map((answer) => ({ answer, changedSince })) : [];
     const kept = own.filter(({ answer, letStand }) => answer === 'change-this' && letStand);
     if (requests.length + kept.length > 0) found.set(frozen.entryId, { requests, kept });

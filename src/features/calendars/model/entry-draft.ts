@@ -10,6 +10,7 @@ import {
 } from '#shared/contracts/calendars.js';
 import { EMPTY_RECORD, type EventRecord } from '#shared/contracts/event-record.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
+import { sameButForVillageWords } from '#shared/calendar/village-words.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 
 type MarkerLead = Extract<EntryLead, { type: 'marker' }>;
@@ -155,6 +156,11 @@ export function differsFrom(draft: EntryDraft, saved: EntryInput): boolean {
 
 export function sameContent(a: EntryInput, b: EntryInput): boolean {
   return sameJson(tidy(a), tidy(b));
+}
+
+/** The same for elders: what the village calls a kind or a work is no part of what they were asked. */
+export function sameForElders(a: EntryInput, b: EntryInput): boolean {
+  return sameButForVillageWords(tidy(a), tidy(b));
 }
 
 /** Trimmed and normalised as the server will store it; untouched where it cannot be stored yet. */

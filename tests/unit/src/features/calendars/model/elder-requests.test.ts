@@ -48,6 +48,12 @@ describe('what elders asked about the newest submission', () => {
     );
   });
 
+  it('says no change where the village only calls the kind otherwise', () => {
+    const renamed = new Map([['e1', content({ kindWord: { word: 'Work of the terraces' } })]]);
+    const found = answersByEntry(version('changes-asked'), [answer({})], renamed);
+    expect(found.get('e1')?.requests[0]?.changedSince).toBe(false);
+  });
+
   it('is kept beside the entry where the elder lets it stand', () => {
     const kept = answer({ letStand: true });
     expect(answersByEntry(version('published'), [kept], drafts).get('e1')).toEqual({
