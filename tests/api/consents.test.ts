@@ -202,13 +202,10 @@ describe('who may do what', () => {
 
   it('does not take the officer who wrote it down for its giver, and says that nobody is named', async () => {
     const { officer, elder } = village;
-    const read = async (itemId: string) =>
-      (
-        await officer
-          .get(`/api/communities/${officer.communityId}/items/entry/${itemId}/consents`)
-          .expect(200)
-      ).body as ItemConsents;
-    expect(await read(village.feast)).toMatchObject({ giverId: null, whomToAsk: 'nobody' });
+    const of = (itemId: string) => `/api/communities/${officer.communityId}/items/entry/${itemId}/consents`;
+    const read = async (id: string) => (await officer.get(of(id)).expect(200)).body as ItemConsents;
+    const unnamed = await addEntry(officer, village.calendarId, { giver: '' });
+    expect(await read(unnamed.id)).toMatchObject({ giverId: null, whomToAsk: 'nobody' });
     expect(await read(village.millet)).toMatchObject({ giverId: elder.personId, whomToAsk: 'giver' });
     const mine = { ...consentContent({ giverId: officer.personId, proof: null }), itemType: 'entry' };
     const said = await officer.post(consentsPath(officer), { ...mine, itemId: village.feast });
