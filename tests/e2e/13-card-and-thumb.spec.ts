@@ -1,9 +1,9 @@
-import type { Calendar, EntryList } from '#shared/contracts/calendars.js';
 import type { Answer } from '#shared/contracts/reviews.js';
 import type { Version } from '#shared/contracts/versions.js';
 import type { Page } from '@playwright/test';
 import { expect, test } from '#tests/support/journey.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import { openReview, reviewPath } from '#tests/support/open-review.js';
 
 /*
  * An elder without a password at hand: the steward makes a card, the elder chooses a PIN on somebody's phone and goes
@@ -34,43 +34,10 @@ async function typePin(page: Page, pin: string, then: string): Promise<void> {
   await page.getByRole('button', { name: then }).click();
 }
 
-async function reviewPath(page: Page): Promise<string> {
-  const { items } = (await (await page.request.get('/api/calendars')).json()) as { items: Calendar[] };
-  const calendar = items.find(({ year }) => year === 2027);
-  return `/calendars/${calendar?.id ?? ''}/versions/${calendar?.outNumber ?? 0}`;
-}
-
-/** What an officer asks of the server, without a screen: the stories before this one may have ended the review. */
-async function ask(page: Page, method: 'post' | 'delete', path: string, data: object = {}): Promise<void> {
-  const session = (await (await page.request.get('/api/session')).json()) as { csrfToken: string };
-  const headers = { 'x-csrf-token': session.csrfToken };
-  expect((await page.request[method](`/api${path}`, { data, headers })).ok()).toBe(true);
-}
-
-/** A submission in review with one entry that nobody has answered. */
 test.beforeAll(async ({ browser }) => {
   const page = await browser.newPage();
   await signIn(page, 'officer');
-  const path = await reviewPath(page);
-  const calendarPath = path.replace(/\/versions.*/u, '');
-  if (!path.endsWith('/0')) {
-    await ask(page, 'post', `${path}/changes-asked`, { reason: 'taken-back', note: '' });
-  }
-  const list = (await (await page.request.get(`/api${calendarPath}/entries`)).json()) as EntryList;
-  await ask(page, 'post', `${calendarPath}/entries/${list.items[0]?.id ?? ''}/copy`);
-  await ask(page, 'post', `${calendarPath}/versions`);
-  await page.close();
-});
-
-/** The draft is left open, and without the copy. */
-test.afterAll(async ({ browser }) => {
-  const page = await browser.newPage();
-  await signIn(page, 'officer');
-  const path = await reviewPath(page);
-  const calendarPath = path.replace(/\/versions.*/u, '');
-  await ask(page, 'post', `${path}/changes-asked`, { reason: 'taken-back', note: '' });
-  const list = (await (await page.request.get(`/api${calendarPath}/entries`)).json()) as EntryList;
-  await ask(page, 'delete', `${calendarPath}/entries/${list.items[1]?.id ?? ''}`);
+  await openReview(page, 1);
   await page.close();
 });
 

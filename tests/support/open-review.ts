@@ -1,6 +1,7 @@
 import type { Calendar, EntryList } from '#shared/contracts/calendars.js';
 import type { Page } from '@playwright/test';
 import { expect } from '@playwright/test';
+import { withoutSigns } from './event-record.js';
 
 /** Where the newest submission of the demo's calendar for 2027 is. */
 export async function reviewPath(page: Page): Promise<string> {
@@ -24,19 +25,18 @@ export async function ask(
 }
 
 /**
- * A submission in review with entries that nobody has answered, copied from the draft's first one. For the officer's
- * page; the villages are the journey's own.
+ * A submission in review with new entries that nobody has answered, like the draft's first one and with all that a new entry
+ * has to say. For the officer's page; the villages are the journey's own.
  */
-export async function openReview(page: Page, copies: number): Promise<string> {
+export async function openReview(page: Page, added: number): Promise<string> {
   const path = await reviewPath(page);
   const calendarPath = path.replace(/\/versions.*/u, '');
   if (!path.endsWith('/0')) {
     await ask(page, 'post', `${path}/changes-asked`, { reason: 'taken-back', note: '' });
   }
-  const list = (await (await page.request.get(`/api${calendarPath}/entries`)).json()) as EntryList;
-  for (let copy = 0; copy < copies; copy += 1) {
-    await ask(page, 'post', `${calendarPath}/entries/${list.items[0]?.id ?? ''}/copy`);
-  }
+  const { items } = (await (await page.request.get(`/api${calendarPath}/entries`)).json()) as EntryList;
+  const like = { ...items[0]?.content, crop: 'all crops', record: withoutSigns() };
+  for (let entry = 0; entry < added; entry += 1) await ask(page, 'post', `${calendarPath}/entries`, like);
   await ask(page, 'post', `${calendarPath}/versions`);
   return reviewPath(page);
 }
