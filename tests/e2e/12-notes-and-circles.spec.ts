@@ -76,6 +76,11 @@ test('the same elder says something to it', async ({ page }) => {
   await signIn(page, 'elder');
   const { path } = await published(page);
   const beside = await openBeside(page, path, title);
+  // The village's languages come late: until then there is nothing to press, rather than a button that does nothing.
+  await page.route('**/api/communities/*', async (route) => {
+    await new Promise((resolve) => setTimeout(resolve, 700));
+    await route.continue();
+  });
   await beside.getByRole('button', { name: 'Say something to it' }).click();
   await expect(beside.getByText('Whoever reads the note may hear it.')).toBeVisible();
   await beside.getByRole('button', { name: 'On to the spoken agreement' }).click();

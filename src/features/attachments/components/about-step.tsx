@@ -2,32 +2,43 @@ import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { DEFAULT_SHARING } from '#shared/contracts/attachments.js';
+import type { Language } from '#shared/contracts/people.js';
 import { communityQuery } from '#src/lib/calendar-queries.js';
 import { useProblemWords } from '#src/lib/problem-words.js';
 import { useActing } from '#src/lib/session.js';
 import { Button } from '#src/ui/button.js';
 import { SelectField, TextField } from '#src/ui/field.js';
+import { Skeleton, TroubleNote } from '#src/ui/waiting.js';
 import type { SharingOfAttachment } from '../model/kept-recordings.js';
 import type { Recorder } from '../model/use-recorder.js';
 import { CircleFields } from './circle-fields.js';
 
-/** Who speaks, in which language, and who may hear it. */
-export function AboutStep({
-  recorder,
-  communityId,
-  fixed,
-}: {
+interface AboutStepProps {
   recorder: Recorder;
-  communityId: string;
   /** Who hears it, where that is not to be chosen. */
   fixed: SharingOfAttachment | undefined;
-}) {
+}
+
+/** Who speaks, in which language, and who may hear it; as soon as the village's languages are known. */
+export function AboutStep({ communityId, ...props }: AboutStepProps & { communityId: string }) {
+  const words = useProblemWords();
+  const { data: community, error, refetch } = useQuery(communityQuery(communityId));
+  if (community) {
+    return <AboutForm {...props} languages={[community.villageLanguage, community.officerLanguage]} />;
+  }
+  if (error === null) return <Skeleton lines={4} />;
+  return <TroubleNote sentence={words.problem(error)} onRetry={() => void refetch()} />;
+}
+
+function AboutForm({
+  recorder,
+  languages,
+  fixed,
+}: AboutStepProps & { languages: readonly [Language, ...Language[]] }) {
   const { t } = useTranslation('attachments');
   const words = useProblemWords();
-  const { data: community } = useQuery(communityQuery(communityId));
-  const languages = community ? [community.villageLanguage, community.officerLanguage] : [];
   const [speaker, setSpeaker] = useState(useActing().displayName);
-  const [language, setLanguage] = useState<string | null>(null);
+  const [language, setLanguage] = useState(languages[0].tag);
   const [circle, setCircle] = useState<SharingOfAttachment>(
     fixed ?? {
       sharingLevel: DEFAULT_SHARING.recording.level,
@@ -37,7 +48,6 @@ export function AboutStep({
   );
   const [isChecked, setIsChecked] = useState(false);
   const needsGroup = circle.sharingLevel === 'group' && circle.sharing.groupId === null;
-  const chosen = language ?? languages[0]?.tag ?? '';
   return (
     <form
       className="grid gap-4"
@@ -45,8 +55,8 @@ export function AboutStep({
       onSubmit={(event) => {
         event.preventDefault();
         setIsChecked(true);
-        if (speaker.trim() !== '' && chosen !== '' && !needsGroup) {
-          void recorder.tellAbout({ speaker: speaker.trim(), language: chosen, ...circle });
+        if (speaker.trim() !== '' && !needsGroup) {
+          void recorder.tellAbout({ speaker: speaker.trim(), language, ...circle });
         }
       }}
     >
@@ -63,7 +73,7 @@ export function AboutStep({
       />
       <SelectField
         label={t('about.language')}
-        value={chosen}
+        value={language}
         onChange={(event) => {
           setLanguage(event.currentTarget.value);
         }}
