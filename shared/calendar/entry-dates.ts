@@ -159,6 +159,8 @@ type LeadDays = MarkerDays | SkyMarkerDays | null;
 
 function leadOf({ lead }: EntryTiming, year: number, leadDays: LeadDays, anchor: AnchorDays | null): Lead {
   switch (lead.type) {
+    case 'none':
+      return withoutSky(null, ['no-lead-yet']);
     case 'fixed-date':
       return withoutSky(oneDay(dayNumberOf(year, lead.date.month, lead.date.day)));
     case 'sky':

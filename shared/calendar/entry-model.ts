@@ -37,7 +37,12 @@ export type EntryLead =
   /** Something that grows, flies or blows, with the days on which it usually comes. */
   | { type: 'nature-sign'; name: string; usual: { from: MonthDay; to: MonthDay }; source: string }
   | { type: 'entry-planned'; entryId: string; day: PlannedDay }
-  | { type: 'entry-actual'; entryId: string };
+  | { type: 'entry-actual'; entryId: string }
+  /** Nothing is chosen yet, in the way that is picked for it. */
+  | { type: 'none'; way: LeadWay };
+
+export type LeadWay =
+  'marker' | 'sky' | 'fixed-date' | 'marker-as-seen' | 'nature-sign' | 'entry-planned' | 'entry-actual';
 
 export type PlannedDay = 'earliest' | 'bestFrom' | 'bestTo' | 'lastAdvised';
 
@@ -75,6 +80,7 @@ export interface EntryTiming {
 }
 
 export const ENTRY_WARNINGS = [
+  'no-lead-yet',
   'no-date-this-year',
   'star-does-not-serve',
   'sign-not-here',

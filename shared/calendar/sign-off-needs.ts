@@ -7,6 +7,7 @@ export const SIGN_OFF_NEEDS = [
   'operation',
   'crop',
   'land',
+  'lead',
   'leadDays',
   'graceDays',
   'signsNeeded',
@@ -39,6 +40,7 @@ export interface NeedsOfEntry {
   caution: string;
   ifLate: string;
   giver: string;
+  lead: { type: string };
   /** Whoever does not want to be named is not asked for a name. */
   sharing?: { naming: string } | undefined;
   record?: NeedsOfRecord | undefined;
@@ -69,12 +71,12 @@ const NOTHING_SAID: NeedsOfRecord = {
 
 /**
  * What is still to be said, in the order of the form; empty where nothing is missing. An entry of the time before there
- * were records goes on without one as it did, until something of it is said.
+ * were records goes on without one as it did, until something of it is said; what its days count from is asked of all.
  */
 export function signOffNeeds(entry: NeedsOfEntry, isOlder = false): SignOffNeed[] {
-  if (entry.record === undefined && isOlder) return [];
+  if (entry.record === undefined && isOlder) return missingLead(entry);
   const record = entry.record ?? NOTHING_SAID;
-  const missing = new Set<SignOffNeed>(missingOfWhose(entry, record));
+  const missing = new Set<SignOffNeed>([...missingLead(entry), ...missingOfWhose(entry, record)]);
   if (entry.kind !== 'marker-only') {
     for (const need of missingOfWork(entry, record)) missing.add(need);
   }
@@ -82,6 +84,10 @@ export function signOffNeeds(entry: NeedsOfEntry, isOlder = false): SignOffNeed[
   if (entry.kind === 'safety' && entry.caution === '') missing.add('caution');
   for (const need of missingOfCheck(entry, record)) missing.add(need);
   return SIGN_OFF_NEEDS.filter((need) => missing.has(need));
+}
+
+function missingLead({ lead }: NeedsOfEntry): SignOffNeed[] {
+  return lead.type === 'none' ? ['lead'] : [];
 }
 
 function missingOfWhose(

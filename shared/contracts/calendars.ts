@@ -155,6 +155,7 @@ export const entryUpdate = z.strictObject({ content: entryInput, version: rowVer
 export type EntryUpdate = z.infer<typeof entryUpdate>;
 
 export const ENTRY_WARNINGS = [
+  'no-lead-yet',
   'no-date-this-year',
   'star-does-not-serve',
   'sign-not-here',

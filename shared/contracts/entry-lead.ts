@@ -24,6 +24,18 @@ export type SeenDay = z.infer<typeof seenDay>;
 export const PLANNED_DAYS = ['earliest', 'bestFrom', 'bestTo', 'lastAdvised'] as const;
 export type PlannedDay = (typeof PLANNED_DAYS)[number];
 
+/** Ways in which an entry can be led; picked before anything is chosen there. */
+export const LEAD_WAYS = [
+  'marker',
+  'sky',
+  'fixed-date',
+  'marker-as-seen',
+  'nature-sign',
+  'entry-planned',
+  'entry-actual',
+] as const;
+export type LeadWay = (typeof LEAD_WAYS)[number];
+
 /** From what the days of an entry are counted. */
 export const entryLead = z.discriminatedUnion('type', [
   z.strictObject({ type: z.literal('marker'), markerKey, phenomenon, occurrence }),
@@ -54,5 +66,7 @@ export const entryLead = z.discriminatedUnion('type', [
   z.strictObject({ type: z.literal('entry-planned'), entryId: id, day: z.enum(PLANNED_DAYS) }),
   /** The day on which another entry was really done; see `actual-days.ts`. */
   z.strictObject({ type: z.literal('entry-actual'), entryId: id }),
+  /** Nothing yet, and in which way it will be: a draft may wait for that, elders are not asked about it. */
+  z.strictObject({ type: z.literal('none'), way: z.enum(LEAD_WAYS) }),
 ]);
 export type EntryLead = z.infer<typeof entryLead>;

@@ -36,7 +36,7 @@ const variantFields = z.strictObject({
 /** Another keeper's timing of the same work or rite: a full copy, beside the entry and never joined with it. */
 export const variantInput = variantFields.superRefine((variant, context) => {
   const { groupId } = variant.sharing ?? PLAIN_DETAILS;
-  if (variant.lead.type === 'entry-planned' || variant.lead.type === 'entry-actual') {
+  if (['entry-planned', 'entry-actual', 'none'].includes(variant.lead.type)) {
     context.addIssue({ code: 'custom', path: ['lead'], message: 'not-in-list' });
   }
   groupFitsLevel({ level: variant.sharingLevel, groupId }, (message) => {

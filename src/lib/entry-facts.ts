@@ -50,7 +50,9 @@ export function useEntryFacts(): EntryFacts {
       {
         key: 'days',
         label: t('form.fourDays'),
-        value: dates?.window ? entryWords.windowSentence(dates.window) : t('days.none', { year }),
+        value: dates?.window
+          ? entryWords.windowSentence(dates.window)
+          : entryWords.window(content, null, year),
       },
       {
         key: 'lastDate',

@@ -1,7 +1,7 @@
 import { goesAsSeen } from '#shared/calendar/as-seen.js';
 import { useCallback, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
-import type { EntryInput, EntryLead, EntryWindow } from '#shared/contracts/calendars.js';
+import type { EntryInput, EntryLead, EntryWarning, EntryWindow } from '#shared/contracts/calendars.js';
 import { dayNumberFromIso } from '#shared/kernel/iso-date.js';
 import { useDateWords } from './date-words.js';
 import { useEntryTitles } from './entry-titles.js';
@@ -27,16 +27,27 @@ export function windowDayNumbers(window: EntryWindow): WindowDayNumbers {
 
 export type { NamesByKey };
 
+/** What is known of an entry beside its days: what it goes by, or what it warns of, says whether it goes by anything. */
+export interface Dated extends Pick<EntryInput, 'protectiveWatch'> {
+  lead?: EntryLead | undefined;
+  warnings?: readonly EntryWarning[] | undefined;
+}
+
 /** What is said about an entry wherever it is shown. Needs the texts `calendars` and `sky`. */
 export interface EntryWords {
   /** `best 14 to 30 June`, `watch 5 December to 28 February`, `on 5 July`. */
-  window: (content: Pick<EntryInput, 'protectiveWatch'>, window: EntryWindow | null, year: number) => string;
+  window: (content: Dated, window: EntryWindow | null, year: number) => string;
   /** The four days as a sentence. */
   windowSentence: (window: EntryWindow) => string;
   /** `Goes by Pleiades: first morning seen`. */
   lead: (content: Pick<EntryInput, 'lead'>, markers: NamesByKey) => string;
   /** The same beside its own label: `Pleiades: first morning seen`. */
   leadAlone: (content: Pick<EntryInput, 'lead'>, markers: NamesByKey) => string;
+}
+
+/** Is nothing chosen yet from which its days are counted? */
+export function goesByNothing({ lead, warnings }: Pick<Dated, 'lead' | 'warnings'>): boolean {
+  return lead?.type === 'none' || warnings?.includes('no-lead-yet') === true;
 }
 
 /** Year that stands for any in "5 July": a day of every year has no 29 February. */
@@ -82,7 +93,7 @@ export function useEntryWords(): EntryWords {
           day: t(`anchors:day.${lead.day}`),
         });
       }
-      if (lead.markerKey === '') return t(`${group}.none`);
+      if (lead.type === 'none' || lead.markerKey === '') return t(`${group}.none`);
       const names = markers.get(lead.markerKey);
       if (lead.type === 'marker-as-seen') {
         return t(`anchors:${group}.seen`, {
@@ -96,7 +107,8 @@ export function useEntryWords(): EntryWords {
       });
     };
     return {
-      window: ({ protectiveWatch }, window, year) => {
+      window: ({ protectiveWatch, ...entry }, window, year) => {
+        if (goesByNothing(entry)) return t('days.noLead');
         if (window === null) return t('days.none', { year });
         const { earliest, bestFrom, bestTo, lastAdvised } = window;
         if (earliest === lastAdvised) return t('days.fixed', { day: dates.day(earliest) });

@@ -1,6 +1,8 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import type { Problem } from '#shared/contracts/problem.js';
+import type { LongLook } from '#shared/contracts/decades.js';
+import type { RolledCalendar, RolloverReport } from '#shared/contracts/rollovers.js';
 import { EntryEntity } from '#server/db/entities/entry.entity.js';
 import { openTestApi, type TestApi } from '#tests/support/api.js';
 import {
@@ -68,6 +70,34 @@ describe('the record of an event', () => {
     const answer = await officer.post(`/api/calendars/${calendar.id}/versions`);
     expect(reasonOf(answer)).toBe('409 record-incomplete');
     expect((answer.body as Problem).names).toEqual(['Sow beans', 'Nothing said']);
+  });
+
+  it('needs something that its days count from: a draft may wait for that, elders are not asked', async () => {
+    const { officer } = village;
+    const unled = { ...whole(), titleOfficer: 'Mend terraces', lead: { type: 'none', way: 'sky' } as const };
+    const { id, content, dates } = await addEntry(officer, calendar.id, unled);
+    expect(content.lead).toEqual(unled.lead);
+    expect(dates).toMatchObject({ window: null, warnings: ['no-lead-yet'] });
+    const answer = await officer.post(`/api/calendars/${calendar.id}/versions`);
+    expect(reasonOf(answer)).toBe('409 record-incomplete');
+    expect((answer.body as Problem).names).toEqual(['Mend terraces']);
+
+    const look = await officer.get(`/api/calendars/${calendar.id}/long-look?from=2027`).expect(200);
+    const [looked] = (look.body as LongLook).entries;
+    expect(looked?.years.map(({ warnings }) => warnings[0])).toEqual(Array(10).fill('no-lead-yet'));
+    const next = await officer.post(`/api/calendars/${calendar.id}/next-year`).expect(200);
+    const { calendarId } = next.body as RolledCalendar;
+    const report = await officer.get(`/api/calendars/${calendarId}/rollover`).expect(200);
+    expect((report.body as RolloverReport).entries).toMatchObject([
+      { titleOfficer: 'Mend terraces', outcome: 'without-days', after: { warnings: ['no-lead-yet'] } },
+    ]);
+    expect((await entriesOf(officer, calendarId))[0]?.content.lead).toEqual(unled.lead);
+
+    const star = entryInput().lead;
+    await officer
+      .put(`/api/calendars/${calendar.id}/entries/${id}`, { content: { ...content, lead: star }, version: 1 })
+      .expect(200);
+    await submit(officer, calendar.id);
   });
 
   it('of an entry that its people keep is theirs: it keeps nothing back and is not told of', async () => {

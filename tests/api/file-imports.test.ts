@@ -78,6 +78,8 @@ describe('a file that comes back', () => {
       sharingLevel: 'village',
       ifLate: '=-5, "quoted"\nand more',
     });
+    const lead = { type: 'none', way: 'entry-actual' } as const;
+    await addEntry(officer, fromId, { titleOfficer: 'Thresh', lead });
     const feast = await addEntry(officer, fromId, {
       ...{ titleOfficer: 'Feast', kind: 'belief', giver: 'Hidden', giverId: elder.personId },
       sharing: details({ naming: 'role' }),
@@ -85,11 +87,11 @@ describe('a file that comes back', () => {
     const said = { uses: ['keep', 'show', 'print', 'feed'] as const, giverId: elder.personId };
     await addConsent(officer, 'entry', feast.id, { ...said, uses: [...said.uses] });
     const before = await exported(fromId);
-    expect(before.entries).toHaveLength(3);
-    expect(await bringIn(before)).toMatchObject({ added: 3, refused: 0 });
+    expect(before.entries).toHaveLength(4);
+    expect(await bringIn(before)).toMatchObject({ added: 4, refused: 0 });
     const after = await exported(intoId);
     expect(plain(after)).toEqual(plain(before));
-    expect(new Set([...before.entries, ...after.entries].map(({ entryId }) => entryId)).size).toBe(6);
+    expect(new Set([...before.entries, ...after.entries].map(({ entryId }) => entryId)).size).toBe(8);
   });
 
   it('lists voices and pictures with their checksums and levels, and says that they stay behind', async () => {

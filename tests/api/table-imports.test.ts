@@ -162,6 +162,7 @@ describe('a table', () => {
       lead: { type: 'sky', spec: { kind: 'zenith-sun' }, occurrence: 2 },
       ...{ hasLastDate: true, lastDate: { date: { month: 7, day: 5 }, source: 'Office' } },
     });
+    await addEntry(officer, from, { lead: { type: 'none', way: 'nature-sign' } });
     const text = (await officer.get(`/api/calendars/${from}/versions/draft/calendar.csv`).expect(200)).text;
     const into = await begin();
     await sent(into, input(linesOf(text)));

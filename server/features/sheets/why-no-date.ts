@@ -11,6 +11,7 @@ export function whyNoDate(
   if (starOutcome !== null && starOutcome !== 'rises-and-sets') return t(`sheet.noDate.${starOutcome}`);
   if (warnings.includes('one-occurrence-only'))
     return t(`sheet.noDate.${sky ? 'fewer-of-them' : 'one-occurrence-only'}`, { year });
+  if (warnings.includes('no-lead-yet')) return t('sheet.noDate.no-lead-yet');
   if (warnings.includes('waits-for-actual-day')) return t('sheet.noDate.waits');
   if (warnings.includes('anchor-gone') || warnings.includes('anchor-without-days')) {
     return t('sheet.noDate.anchor');

@@ -17,6 +17,7 @@ export const texts = {
   tableCaption: 'Days of every entry from {{from}} to {{to}}',
   picture: '{{title}}: a bar for each year. {{summary}}',
   none: 'no days',
+  noLead: 'It goes by nothing yet, so it has no days.',
   noYear: 'It has no days in any of these years.',
   same: 'Best from {{day}} in every year.',
   between: 'Best from between {{from}} ({{fromYear}}) and {{to}} ({{toYear}}).',

@@ -260,6 +260,7 @@ export const texts = {
       'none-in-this-year': 'its star has no such day in {{year}}.',
       'one-occurrence-only': 'its star has this day only once in {{year}}.',
       'fewer-of-them': '{{year}} has fewer of them.',
+      'no-lead-yet': 'nothing is chosen yet from which its days are counted.',
       waits: 'its days are counted once the work before it is done.',
       countedFrom: 'its days are counted from the day of “{{title}}”, once that is done.',
       anchor: 'the work that it is counted from has no day.',

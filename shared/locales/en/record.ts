@@ -165,6 +165,7 @@ export const texts = {
       operation: 'the kind of work',
       crop: 'the crop',
       land: 'on which land',
+      lead: 'what its days count from',
       leadDays: 'how long before to get ready',
       graceDays: 'the days of grace',
       signsNeeded: 'how many signs are needed',

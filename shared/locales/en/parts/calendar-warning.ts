@@ -2,6 +2,7 @@
 export const warning = {
   title: 'Look at this',
   stillSaves: 'You can save the draft all the same.',
+  'no-lead-yet': 'It goes by nothing yet, so it has no days. Choose that before elders are asked about it.',
   'no-date-this-year': '{{marker}} has no {{phenomenon}} in {{year}}, so this entry has no days.',
   'star-does-not-serve': '{{marker}} has no first or last days here, so no days can be counted from it.',
   'sign-not-here': '{{sign}}: this never happens here, so no days can be counted from it. {{reason}}',

@@ -12,7 +12,7 @@ import { MarkerIcon } from '#src/ui/icons/marker-icon.js';
 import { LaneKey, WindowKey } from '#src/ui/pictures/lane-key.js';
 import { YearBoard } from '#src/ui/pictures/year-board.js';
 import type { ShownEntry } from '../model/preview-dates.js';
-import { barsOf, besideOf, lanesOf, pairingOf, undatedOf } from '../model/strip-model.js';
+import { barsOf, besideOf, lanesOf, pairingOf, undatedOf, unledOf } from '../model/strip-model.js';
 import type { Editor } from '../model/use-editor.js';
 import type { DraftChange } from '../model/use-entry-edits.js';
 import type { SaveEntry } from '../model/use-save-entry.js';
@@ -38,6 +38,7 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
   const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
   const nameOf = (entry: ShownEntry) => entry.content.titleOfficer || t('editor.untitled');
   const undated = undatedOf(shown);
+  const unled = unledOf(shown);
   const beside = besideOf(shown, strip.whole);
   const inTable = (entryId: string, change: DraftChange) => {
     const entry = shown.find(({ id }) => id === entryId);
@@ -94,6 +95,14 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
         moves={canWrite ? moves : undefined}
       />
       {markers.isError && <p className="text-small">{t('editor.stripTrouble')}</p>}
+      {unled.length > 0 && (
+        <p className="text-small text-umber-soft">
+          {t('strip.unled', {
+            count: unled.length,
+            titles: listWords(unled.map(nameOf), i18n.language),
+          })}
+        </p>
+      )}
       {undated.length > 0 && shown.length > 0 && (
         <p className="text-small text-umber-soft">
           {t('strip.undated', {

@@ -44,7 +44,9 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
       <span className="min-w-0">
         <span className="block">{content.titleOfficer || t('editor.untitled')}</span>
         <span className="range-line">
-          {dates === null ? t('days.notYet') : words.window(content, dates.window, year)}
+          {dates === null && content.lead.type !== 'none'
+            ? t('days.notYet')
+            : words.window(content, dates?.window ?? null, year)}
         </span>
         <KeptChip level={content.sharingLevel} details={content.sharing} />
         <RowMarks {...props} />

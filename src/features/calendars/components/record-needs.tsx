@@ -12,7 +12,7 @@ export function RecordNeeds({ form, isOlder }: { form: FormState; isOlder: boole
   const { t } = useTranslation('record');
   const { content, isKeepers } = form;
   const needs = signOffNeeds(content, isOlder);
-  if (isOlder && content.record === undefined)
+  if (isOlder && content.record === undefined && needs.length === 0)
     return <p className="mt-3 text-small text-umber-soft">{t('needs.hint')}</p>;
   if (needs.length === 0 || (isKeepers && content.record === undefined)) return null;
   return (

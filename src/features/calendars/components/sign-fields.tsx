@@ -78,11 +78,11 @@ export function SignFields({ form, onSearch }: { form: FormState; onSearch: () =
         </div>
         <FieldNotes inputId={labelId} problem={problem} />
       </div>
-      {starOptions !== null && 'markerKey' in sky.spec && (
+      {hasSign(sky) && starOptions !== null && 'markerKey' in sky.spec && (
         <ComboField
           label={t('sign.star')}
           options={starOptions}
-          value={sky.spec.markerKey === '' ? null : sky.spec.markerKey}
+          value={sky.spec.markerKey}
           problem={at('lead.spec.markerKey')}
           onChange={(markerKey) => {
             if (markerKey !== null && 'markerKey' in sky.spec) setSpec({ ...sky.spec, markerKey });

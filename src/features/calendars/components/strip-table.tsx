@@ -26,7 +26,7 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
   const words = useEntryWords();
   const steady = useSteady(ways);
   const part = useShownPart(entries);
-  const days = ({ dates: found }: ShownEntry) =>
+  const days = ({ content, dates: found }: ShownEntry) =>
     found?.window ? (
       DAYS.map((day) => (
         <td key={day} className="whitespace-nowrap">
@@ -34,7 +34,7 @@ export function StripTable({ entries, year, markers, ways }: StripTableProps) {
         </td>
       ))
     ) : (
-      <td colSpan={DAYS.length}>{t('days.none', { year })}</td>
+      <td colSpan={DAYS.length}>{words.window(content, null, year)}</td>
     );
   return (
     <>

@@ -1,6 +1,6 @@
 import { seenOf, withSeen } from '#shared/calendar/as-seen.js';
 import { isStarLead, type StarLead } from '#shared/calendar/entry-model.js';
-import type { PlannedDay, SeenDay } from '#shared/contracts/entry-lead.js';
+import type { LeadWay, PlannedDay, SeenDay } from '#shared/contracts/entry-lead.js';
 import {
   entryInput,
   type EntryInput,
@@ -23,7 +23,7 @@ type NatureLead = Extract<EntryLead, { type: 'nature-sign' }>;
  * marked as having one: a change of mind loses nothing. What is saved is `contentOf(draft)`.
  */
 export interface EntryDraft extends Omit<EntryInput, 'lead' | 'lastDate' | 'record'> {
-  leadType: EntryLead['type'];
+  leadType: LeadWay;
   /** `markerKey` is empty until a star or figure is chosen. */
   marker: Omit<MarkerLead, 'type'>;
   /** Without a star until a sign is chosen; see `hasSign`. Whether its day as seen leads; that day is `seen`. */
@@ -59,7 +59,7 @@ export function draftOf(content: EntryInput): EntryDraft {
   const { lead, lastDate, ...rest } = content;
   return {
     ...rest,
-    leadType: lead.type,
+    leadType: lead.type === 'none' ? lead.way : lead.type,
     marker: isStarLead(lead) ? markerOf(lead) : NO_MARKER,
     sky: lead.type === 'sky' ? skyOf(lead) : NO_SKY,
     fixed: lead.type === 'fixed-date' ? withoutType(lead) : NO_FIXED,
@@ -78,11 +78,9 @@ export function hasSign({ spec }: EntryDraft['sky']): boolean {
   return !('markerKey' in spec) || spec.markerKey !== '';
 }
 
-/** What would be saved. It may still be incomplete; the contract's schema says where. */
-export function contentOf(draft: EntryDraft): EntryInput {
-  const { leadType, marker, sky, fixed, seen, nature, anchor, lastDate, ...said } = draft;
-  const { sharing, giverId, record, kindWord, ...rest } = said;
-  const leads: Record<EntryLead['type'], EntryLead> = {
+/** What leads as it is written, also while nothing is chosen in it. */
+export function writtenLead({ leadType, marker, sky, fixed, seen, nature, anchor }: EntryDraft): EntryLead {
+  const leads: Record<LeadWay, EntryLead> = {
     marker: { type: 'marker', ...marker },
     sky: withSeen<EntryLead>({ type: 'sky', ...sky }, seen),
     'fixed-date': { type: 'fixed-date', ...fixed },
@@ -91,9 +89,36 @@ export function contentOf(draft: EntryDraft): EntryInput {
     'entry-planned': { type: 'entry-planned', ...anchor },
     'entry-actual': { type: 'entry-actual', entryId: anchor.entryId },
   };
+  return leads[leadType];
+}
+
+/** Is something chosen in the way that is picked? */
+function isChosen(draft: EntryDraft): boolean {
+  const { marker, sky, fixed, seen, nature, anchor } = draft;
+  switch (draft.leadType) {
+    case 'marker':
+      return marker.markerKey !== '';
+    case 'marker-as-seen':
+      return marker.markerKey !== '' || seen !== null;
+    case 'sky':
+      return hasSign(sky);
+    case 'fixed-date':
+      return !sameJson(fixed, NO_FIXED);
+    case 'nature-sign':
+      return !sameJson(nature, NO_NATURE);
+    case 'entry-planned':
+    case 'entry-actual':
+      return anchor.entryId !== '';
+  }
+}
+
+/** What would be saved. It may still be incomplete; the contract's schema says where. */
+export function contentOf(draft: EntryDraft): EntryInput {
+  const { leadType, marker, sky, fixed, seen, nature, anchor, lastDate, ...said } = draft;
+  const { sharing, giverId, record, kindWord, ...rest } = said;
   return {
     ...rest,
-    lead: leads[leadType],
+    lead: isChosen(draft) ? writtenLead(draft) : { type: 'none', way: leadType },
     lastDate: draft.hasLastDate ? lastDate : null,
     // Left out where they say nothing, so that older texts and their hashes stay as they are.
     ...(sharing && !sameJson(sharing, PLAIN_DETAILS) ? { sharing } : {}),

@@ -58,5 +58,14 @@ export function besideOf(entries: readonly ShownEntry[], { first, last }: DaySpa
 
 /** Entries whose lead brings no day this year. One that goes by nothing yet is not among them. */
 export function undatedOf(entries: readonly ShownEntry[]): ShownEntry[] {
-  return entries.filter((entry) => entry.dates !== null && entry.dates.window === null);
+  return entries.filter(
+    ({ content, dates }) => content.lead.type !== 'none' && dates !== null && dates.window === null,
+  );
+}
+
+/** Entries that go by nothing yet; of a new one only once somebody wrote to it. */
+export function unledOf(entries: readonly ShownEntry[]): ShownEntry[] {
+  return entries.filter(
+    ({ content, saved, unsaved }) => content.lead.type === 'none' && (saved !== null || unsaved),
+  );
 }

@@ -2,7 +2,7 @@ import type { EntryInput } from '#shared/contracts/calendars.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
 import { variantInput, type VariantInput } from '#shared/contracts/variants.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
-import { contentOf, draftOf, type EntryDraft } from './entry-draft.js';
+import { contentOf, draftOf, writtenLead, type EntryDraft } from './entry-draft.js';
 
 /** A variant while it is being written: its timing as an entry's draft, and what is its own. */
 export interface VariantDraft {
@@ -32,7 +32,8 @@ export function variantDraftOf(entry: EntryInput, saved: VariantInput | null): V
 
 /** What would be saved; the contract says what is still missing. */
 export function variantOf({ timing, own }: VariantDraft): VariantInput {
-  const { lead, offsets, otherSigns, ifLate, sharingLevel, sharing } = contentOf(timing);
+  const lead = writtenLead(timing);
+  const { offsets, otherSigns, ifLate, sharingLevel, sharing } = contentOf(timing);
   const plain = sharing === undefined || sameJson(sharing, PLAIN_DETAILS);
   return { ...own, lead, offsets, otherSigns, ifLate, sharingLevel, ...(plain ? {} : { sharing }) };
 }

@@ -27,6 +27,8 @@ const OTHER_DAYS_MAX = 2;
 /** @param row of the leading star; null where none is known */
 export function waysOut(warning: EntryWarning, draft: EntryDraft, row: MarkerRow | null): Way[] {
   switch (warning) {
+    case 'no-lead-yet':
+      return [{ kind: 'otherStar' }, { kind: 'otherSign' }, { kind: 'fixedDate' }];
     case 'sign-not-here':
       return [{ kind: 'otherSign' }, { kind: 'fixedDate' }];
     case 'no-date-this-year':

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import type { LookedEntry } from '#shared/contracts/decades.js';
 import { useDateWords } from '#src/lib/date-words.js';
-import { windowDayNumbers } from '#src/lib/entry-words.js';
+import { goesByNothing, windowDayNumbers } from '#src/lib/entry-words.js';
 import { SignIcon } from '#src/ui/icons/drawn-icon.js';
 import { MonthScale } from '#src/ui/pictures/month-scale.js';
 import { WindowBar } from '#src/ui/pictures/window-bar.js';
@@ -89,7 +89,7 @@ function useSummary(): (entry: LookedEntry) => string {
   const dates = useDateWords();
   return (entry) => {
     const range = bestFromRange(entry);
-    if (range === null) return t('noYear');
+    if (range === null) return t(entry.years.every(goesByNothing) ? 'noLead' : 'noYear');
     const { first, last, yearsWithout } = range;
     const days = { from: dates.day(first.window.bestFrom), to: dates.day(last.window.bestFrom) };
     const sentences = [

@@ -26,8 +26,8 @@ export function YearsTable({ look, entries }: { look: LongLook; entries: readonl
         {entries.map((entry) => (
           <tr key={entry.entryId}>
             <th scope="row">{entry.titleOfficer}</th>
-            {entry.years.map(({ year, window }) => (
-              <td key={year}>{words.window(entry, window, year)}</td>
+            {entry.years.map(({ year, window, warnings }) => (
+              <td key={year}>{words.window({ ...entry, warnings }, window, year)}</td>
             ))}
           </tr>
         ))}

@@ -45,8 +45,8 @@ export function RolledTable({ group, entries, report }: RolledTableProps) {
                 </>
               )}
             </th>
-            <td>{words.window(entry, entry.before.window, from)}</td>
-            <td>{words.window(entry, entry.after.window, year)}</td>
+            <td>{words.window({ ...entry, warnings: entry.before.warnings }, entry.before.window, from)}</td>
+            <td>{words.window({ ...entry, warnings: entry.after.warnings }, entry.after.window, year)}</td>
             <td>
               {moveWords(entry.movedDays)}
               {entry.why && (

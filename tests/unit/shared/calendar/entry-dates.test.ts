@@ -5,6 +5,13 @@ import { markerYear, occurrence, timing } from '#tests/support/calendar-facts.js
 
 const june = { expected: '2027-06-07', early: '2027-06-03', late: '2027-06-12' };
 
+describe('an entry that goes by nothing yet', () => {
+  it('has no days, and says that nothing is chosen rather than that its year has none', () => {
+    const unled = timing({ lead: { type: 'none', way: 'marker' } });
+    expect(entryDatesOf(unled, 2027, null)).toMatchObject({ window: null, warnings: ['no-lead-yet'] });
+  });
+});
+
 describe('an entry that goes by a marker', () => {
   it('counts from the expected day; the range stands beside the window and is not added', () => {
     const sharp = entryDatesOf(timing(), 2027, markerYear({ occurrences: [june] }));

@@ -26,6 +26,12 @@ describe('what an event must say before elders are asked', () => {
     expect(signOffNeeds(content({ record }), true)).toContain('responsible');
   });
 
+  it('is what its days count from for every entry, also one of the time before', () => {
+    const lead = { type: 'none', way: 'marker' } as const;
+    expect(signOffNeeds(content({ record: undefined, lead }), true)).toEqual(['lead']);
+    expect(signOffNeeds(sowing({ lead }))).toEqual(['lead']);
+  });
+
   it('is nothing more where all is said, and such an entry is accepted', () => {
     expect(signOffNeeds(sowing())).toEqual([]);
     expect(entryInput.safeParse(sowing()).success).toBe(true);
@@ -33,7 +39,8 @@ describe('what an event must say before elders are asked', () => {
 
   it('is all of it, in the order of the form, for farm work of which nothing is said', () => {
     const record = { ...EMPTY_RECORD, what: { ...EMPTY_RECORD.what, operation: 'sow' as const } };
-    const bare = sowing({ record, titleVillage: '', crop: '', giver: '', ifLate: '', caution: 'Hot.' });
+    const lead = { type: 'none', way: 'sky' } as const;
+    const bare = sowing({ record, titleVillage: '', crop: '', giver: '', ifLate: '', caution: 'Hot.', lead });
     const all = SIGN_OFF_NEEDS.filter((need) => !['operation', 'caution', 'checkedLate'].includes(need));
     expect(signOffNeeds(bare)).toEqual(all);
   });

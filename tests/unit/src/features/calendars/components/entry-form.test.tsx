@@ -83,3 +83,22 @@ it('counts a sign of the sky from the day on which people saw it, says both coun
   seenOn(`${YEAR}-11-20`);
   expect(await screen.findByText(/152 days from the computed day/)).toBeTruthy();
 });
+
+it('asks once for a sign of the sky, saves the entry before one is chosen, and stays where it was picked', async () => {
+  const log = answerWith(server(draft()));
+  const { user } = await renderOnBoard(
+    <EditorPage about={() => null} tasks={() => null} lockedAction={() => null} />,
+    { path: `/calendars/${CALENDAR.id}?entry=new-x`, pattern: '/calendars/:calendarId' },
+  );
+  await user.type(await screen.findByLabelText(/Name of the work or rite/), 'Mend the terraces');
+  await user.click(screen.getByRole('radio', { name: /^Another sign of the sky/ }));
+  expect(screen.getByRole('button', { name: 'Choose a sign' })).toBeTruthy();
+  expect(screen.queryByRole('combobox', { name: /Star or figure/ })).toBeNull();
+  await user.click(screen.getByRole('button', { name: 'Save the entry' }));
+  await screen.findByText('Saved: Mend the terraces.');
+  const sent = log.find(({ method }) => method === 'POST')?.body;
+  expect(sent).toMatchObject({ lead: { type: 'none', way: 'sky' } });
+  expect(screen.getByRole('radio', { name: /^Another sign of the sky/ })).toHaveProperty('checked', true);
+  expect(await screen.findByText('without a date yet')).toBeTruthy();
+  expect(screen.getByText('Without a bar, because it goes by nothing yet: Mend the terraces.')).toBeTruthy();
+});

@@ -9,10 +9,11 @@ import { content } from '#tests/support/draft-of-tazimel.js';
 
 describe('what is not accepted', () => {
   it('stands at its field with one code each', () => {
-    const problems = problemsOf(contentOf(newDraft()));
+    const fixed = { date: { month: 3, day: 1 }, source: '' };
+    const problems = problemsOf(contentOf({ ...newDraft(), leadType: 'fixed-date', fixed }));
     expect([...problems]).toEqual([
       ['titleOfficer', { code: 'required' }],
-      ['lead.markerKey', { code: 'marker-key' }],
+      ['lead.source', { code: 'required' }],
     ]);
     expect(groupsWithProblems(problems)).toEqual(['what', 'when']);
   });

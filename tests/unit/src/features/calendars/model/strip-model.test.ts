@@ -6,6 +6,7 @@ import {
   lanesOf,
   pairingOf,
   undatedOf,
+  unledOf,
 } from '#src/features/calendars/model/strip-model.js';
 import type { ShownEntry } from '#src/features/calendars/model/preview-dates.js';
 import { entryOf, tazimelMarkers } from '#tests/support/draft-of-tazimel.js';
@@ -36,6 +37,15 @@ describe('the year’s strip', () => {
     expect(bar?.days.earliest).toBe(dayNumberFromIso(entries[0]?.dates?.window?.earliest ?? ''));
     const begun: ShownEntry = { ...shown(3), saved: null, dates: null };
     expect(undatedOf([...entries, begun])).toEqual([undated]);
+  });
+
+  it('lists what goes by nothing yet by itself, and not a new entry to which nobody wrote', () => {
+    const unled = shown(2, { lead: { type: 'none', way: 'marker' } });
+    const begun: ShownEntry = { ...unled, id: 'new-x', saved: null, dates: null };
+    expect(unledOf([shown(1), unled, begun])).toEqual([unled]);
+    expect(unledOf([{ ...begun, unsaved: true }])).toHaveLength(1);
+    expect(undatedOf([unled])).toEqual([]);
+    expect(barsOf([unled], () => '')).toEqual([]);
   });
 
   it('names what lies wholly beside the year, and nothing that reaches into it', () => {
