@@ -25,13 +25,17 @@ export type DayOrder = 'day-first' | 'month-first' | null;
 
 export type ImportDateProblem =
   | 'date-not-read'
-  | 'no-such-day'
+  /** With the month, whose length is told. */
+  | `no-such-day-${(typeof MONTH_NUMBERS)[number]}`
   | 'no-such-month'
   | 'no-such-ten-days'
   | 'day-or-ten-days'
   | 'other-year'
   | 'which-first'
   | ImportSignProblem;
+
+/** Months as their numbers stand in codes. */
+const MONTH_NUMBERS = [1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12] as const;
 
 /** What one cell says. A ten-day part has a first and a last day; every other day is both. */
 export type DateCell =
@@ -161,9 +165,10 @@ function oneDay(month: number, day: number, year: number | null, calendarYear: n
   if (year !== null && year !== calendarYear && year !== calendarYear + 1) {
     return { kind: 'problem', problem: 'other-year' };
   }
-  if (month < 1 || month > MONTHS) return { kind: 'problem', problem: 'no-such-month' };
+  const known = MONTH_NUMBERS.find((each) => each === month);
+  if (known === undefined) return { kind: 'problem', problem: 'no-such-month' };
   // A day of every year has no 29 February.
-  if (day < 1 || day > daysInMonth(1, month)) return { kind: 'problem', problem: 'no-such-day' };
+  if (day < 1 || day > daysInMonth(1, month)) return { kind: 'problem', problem: `no-such-day-${known}` };
   return { kind: 'day', first: { month, day }, last: { month, day }, year };
 }
 

@@ -169,12 +169,14 @@ function swappedDays(
   return [];
 }
 
-interface DatedDay {
+/** A day of a table, with its year where it names one. */
+export interface DatedDay {
   date: MonthDay;
   year: number | null;
 }
 
-function isFarOverYearsEnd(sooner: DatedDay, later: DatedDay): boolean {
+/** Are two days probably the wrong way round? Not where both name their years. */
+export function isFarOverYearsEnd(sooner: DatedDay, later: DatedDay): boolean {
   const isOverYearsEnd = numberOf(later.date) < numberOf(sooner.date);
   const isSaidSo = sooner.year !== null && later.year !== null && later.year > sooner.year;
   return isOverYearsEnd && !isSaidSo && forward(sooner.date, later.date) > LONGEST_OVER_YEARS_END_DAYS;

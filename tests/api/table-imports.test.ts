@@ -74,7 +74,7 @@ describe('a table', () => {
         5,
         '',
         [
-          { column: 'bestFrom', code: 'no-such-day' },
+          { column: 'bestFrom', code: 'no-such-day-4' },
           { column: 'bestTo', code: 'day-or-ten-days' },
           { column: 'kind', code: 'unknown-kind' },
           { column: 'titleOfficer', code: 'required' },

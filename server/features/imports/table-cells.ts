@@ -1,4 +1,5 @@
 import { dateCell, type ImportDateFacts } from '#shared/calendar/import-dates.js';
+import { isFarOverYearsEnd } from '#shared/calendar/import-window.js';
 import type { NamedSign } from '#shared/calendar/import-signs.js';
 import type { EntryLead, EntryOffsets } from '#shared/contracts/calendars.js';
 import type { MonthDay } from '#shared/contracts/common.js';
@@ -41,11 +42,21 @@ export function fixedDay(
   text: string,
   facts: ImportDateFacts,
   end: 'first' | 'last' = 'last',
-): { date: MonthDay | null; problem: string | null } {
+): { date: MonthDay | null; year: number | null; problem: string | null } {
   const read = dateCell(text, facts);
-  if (read.kind === 'empty') return { date: null, problem: null };
-  if (read.kind === 'day') return { date: read[end], problem: null };
-  return { date: null, problem: read.kind === 'problem' ? read.problem : 'date-not-read' };
+  if (read.kind === 'empty') return { date: null, year: null, problem: null };
+  if (read.kind === 'day') return { date: read[end], year: read.year, problem: null };
+  return { date: null, year: null, problem: read.kind === 'problem' ? read.problem : 'date-not-read' };
+}
+
+/** Usual days that are probably the wrong way round. A table of our own says what an entry says, whatever that is. */
+export function areSwapped(
+  from: ReturnType<typeof fixedDay>,
+  to: ReturnType<typeof fixedDay>,
+  cells: Cells,
+): boolean {
+  if (from.date === null || to.date === null || cellOf(cells, 'leadType') !== '') return false;
+  return isFarOverYearsEnd({ date: from.date, year: from.year }, { date: to.date, year: to.year });
 }
 
 const ISO = /^(\d{4})-(\d{2})-(\d{2})$/u;

@@ -28,7 +28,7 @@ export function recordOfLine(
     return text === '' ? null : (words.get(text) ?? amiss(column, problem));
   };
   const { codes } = facts;
-  const { list, problem: signProblem } = signsOfCell(cell('signs'), facts);
+  const { list, problem: signProblem } = signsOfCell(cells, facts);
   if (signProblem !== null) amiss('signs', signProblem);
   const mustHave = mustHaveOf(cell('mustHaveSign'), list);
   if (mustHave === 'unknown') amiss('mustHaveSign', 'which-sign');

@@ -2,7 +2,7 @@ import { plainWords } from '#shared/calendar/import-dates.js';
 import type { RecordSign } from '#shared/contracts/event-record.js';
 import { sameJson } from '#shared/kernel/canonical-json.js';
 import { partsOfCell } from '#shared/kernel/cell-parts.js';
-import { fixedDay, type TableFacts } from './table-cells.js';
+import { areSwapped, cellOf, fixedDay, type Cells, type TableFacts } from './table-cells.js';
 
 const SIGN_PARTS = 7;
 
@@ -10,8 +10,8 @@ const SIGN_PARTS = 7;
  * Signs of one cell: kind, name, what to look for, where, usual from, usual to, still seen. One whose name stands in the
  * village's list is that one, unless the line says something else of it.
  */
-export function signsOfCell(cell: string, facts: TableFacts): { list: RecordSign[]; problem: string | null } {
-  const read = partsOfCell(cell).map((parts) => signOf(parts, facts));
+export function signsOfCell(cells: Cells, facts: TableFacts): { list: RecordSign[]; problem: string | null } {
+  const read = partsOfCell(cellOf(cells, 'signs')).map((parts) => signOf(parts, cells, facts));
   const [problem = null] = read.filter((each) => typeof each === 'string');
   return { list: read.filter((each) => typeof each !== 'string'), problem };
 }
@@ -26,7 +26,7 @@ export function mustHaveOf(cell: string, list: readonly RecordSign[]): number | 
   return list[index] === undefined ? 'unknown' : index;
 }
 
-function signOf(parts: readonly string[], facts: TableFacts): RecordSign | string {
+function signOf(parts: readonly string[], cells: Cells, facts: TableFacts): RecordSign | string {
   const [kind = '', name = '', look = '', where = '', usualFrom = '', usualTo = '', still = ''] = parts;
   const { signTypes, stillSeen: seenWords } = facts.codes;
   if (name === '' || parts.length > SIGN_PARTS) return 'sign-parts';
@@ -37,6 +37,7 @@ function signOf(parts: readonly string[], facts: TableFacts): RecordSign | strin
   const problem = from.problem ?? to.problem;
   if (problem !== null) return problem;
   if ((from.date === null) !== (to.date === null)) return 'sign-parts';
+  if (areSwapped(from, to, cells)) return 'swapped-usual';
   const usual = from.date && to.date && { from: from.date, to: to.date };
   const stillSeen = still === '' ? null : seenWords.get(plainWords(still));
   if (stillSeen === undefined) return 'unknown-still-seen';

@@ -11,7 +11,15 @@ import { entryLead, type EntryOffsets } from '#shared/contracts/calendars.js';
 import type { ImportColumn } from '#shared/contracts/imports.js';
 import { fieldErrors } from '../../http/field-errors.js';
 import { ownLead } from './own-lead.js';
-import { cellOf, fixedDay, sourceOf, type Cells, type LineProblem, type Timing } from './table-cells.js';
+import {
+  areSwapped,
+  cellOf,
+  fixedDay,
+  sourceOf,
+  type Cells,
+  type LineProblem,
+  type Timing,
+} from './table-cells.js';
 
 /** By the columns of our own CSV where they are there, else by words and days. */
 export function timingOf(cells: Cells, facts: ImportDateFacts): Timing {
@@ -74,6 +82,12 @@ function natureTiming(
     ...(to.problem === null ? [] : [{ column: 'usualTo' as const, code: to.problem }]),
   ];
   if (problems.length > 0) return amiss(problems);
+  if (areSwapped(from, to, cells)) {
+    return amiss([
+      { column: 'usualFrom', code: 'swapped-first' },
+      { column: 'usualTo', code: 'swapped-second' },
+    ]);
+  }
   const best = { from: dayOfEveryYear(days.bestFrom, 'first'), to: dayOfEveryYear(days.bestTo, 'last') };
   const usual = usualDays({ from: from.date, to: to.date }, best, offsets);
   if (usual === null) return amiss([{ column: 'usualFrom', code: 'usual-days-missing' }]);

@@ -41,8 +41,8 @@ export const texts = {
     'day-first': 'The day comes first: 6 July',
     'month-first': 'The month comes first: 7 June',
     look: 'Look at every line',
-    examples_one: '{{count}} example line is passed over.',
-    examples_other: '{{count}} example lines are passed over.',
+    examples_one: '{{count}} example line of the empty table is passed over: nobody changed it.',
+    examples_other: '{{count}} example lines of the empty table are passed over: nobody changed them.',
   },
   nature: {
     title: 'Signs of nature?',

@@ -221,6 +221,18 @@ export const texts = {
     'day-taken': 'Another month begins on this day already. Choose another day, or take one of the two out.',
     'too-many-months': 'A village names at most 24 months. Take some out.',
     'no-such-day': 'This month has no such day. For the end of February write the 28th.',
+    'no-such-day-1': 'January has 31 days.',
+    'no-such-day-2': 'February has 28 days: what is counted by comes every year. For its end write the 28th.',
+    'no-such-day-3': 'March has 31 days.',
+    'no-such-day-4': 'April has 30 days.',
+    'no-such-day-5': 'May has 31 days.',
+    'no-such-day-6': 'June has 30 days.',
+    'no-such-day-7': 'July has 31 days.',
+    'no-such-day-8': 'August has 31 days.',
+    'no-such-day-9': 'September has 30 days.',
+    'no-such-day-10': 'October has 31 days.',
+    'no-such-day-11': 'November has 30 days.',
+    'no-such-day-12': 'December has 31 days.',
     'year-order': 'The last year comes after the first one.',
     'month-day': 'Write a month and a day, such as 06-07.',
     'not-before-year': 'Give a year before the one that is asked for.',
@@ -271,6 +283,8 @@ export const texts = {
     'unknown-sign-words':
       'No sign of the sky goes by these words. Name a star with its day, such as “Pleiades, first morning”, write a day of the year, or say above that it is a sign of nature.',
     'date-missing': 'This line says no day. Name a sign, or write from when the best days are.',
+    'swapped-usual':
+      'These usual days are probably the wrong way round: from the first to the last of them more than half a year would pass. If they are meant so, write both with their years.',
     'swapped-first':
       'From this day to the one named next it would be more than half a year, over the year’s end.',
     'swapped-second':

@@ -258,5 +258,31 @@ export const texts = {
         bestTo: 'first ten days of December',
       },
     },
+    /** Lines of templates of before, which people may still have. */
+    before: {
+      bySign: {
+        number: '1',
+        titleOfficer: 'Example: sow the first field',
+        kind: 'farm',
+        when: 'Pleiades, first morning',
+        bestFromDays: '7',
+        bestToDays: '23',
+        otherSigns: 'Soil wet to a hand depth',
+      },
+      byDay: {
+        number: '3',
+        titleOfficer: 'Example: close the store',
+        kind: 'household',
+        bestFrom: '20 November',
+        bestTo: 'December 1',
+      },
+      byTenDays: {
+        number: '3',
+        titleOfficer: 'Example: close the store',
+        kind: 'household',
+        bestFrom: '20 November',
+        bestTo: 'early December',
+      },
+    },
   },
 } as const;

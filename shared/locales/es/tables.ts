@@ -276,5 +276,14 @@ export const texts = {
         bestTo: 'primeros diez días de diciembre',
       },
     },
+    before: {
+      byTenDays: {
+        number: '3',
+        titleOfficer: 'Ejemplo: cerrar el granero',
+        kind: 'casa',
+        bestFrom: '20 de noviembre',
+        bestTo: 'principios de diciembre',
+      },
+    },
   },
 } as const;

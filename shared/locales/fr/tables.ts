@@ -274,5 +274,14 @@ export const texts = {
         bestTo: 'première décade de décembre',
       },
     },
+    before: {
+      byTenDays: {
+        number: '3',
+        titleOfficer: 'Exemple : fermer le grenier',
+        kind: 'maison',
+        bestFrom: '20 novembre',
+        bestTo: 'début décembre',
+      },
+    },
   },
 } as const;

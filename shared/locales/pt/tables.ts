@@ -273,5 +273,14 @@ export const texts = {
         bestTo: 'primeiros dez dias de dezembro',
       },
     },
+    before: {
+      byTenDays: {
+        number: '3',
+        titleOfficer: 'Exemplo: fechar o celeiro',
+        kind: 'casa',
+        bestFrom: '20 de novembro',
+        bestTo: 'início de dezembro',
+      },
+    },
   },
 } as const;

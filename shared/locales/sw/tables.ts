@@ -257,5 +257,14 @@ export const texts = {
         bestTo: 'siku kumi za kwanza za Desemba',
       },
     },
+    before: {
+      byTenDays: {
+        number: '3',
+        titleOfficer: 'Mfano: kufunga ghala',
+        kind: 'nyumba',
+        bestFrom: '20 Novemba',
+        bestTo: 'mwanzo wa Desemba',
+      },
+    },
   },
 } as const;

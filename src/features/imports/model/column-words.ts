@@ -5,7 +5,11 @@ import type { ExampleLine } from './template.js';
 export interface ColumnTexts {
   column: Partial<Record<ImportColumn, string>>;
   alias: Partial<Record<ImportColumn, string>>;
-  template: { lines: Readonly<Record<string, ExampleLine>> };
+  template: {
+    lines: Readonly<Record<string, ExampleLine>>;
+    /** Lines of templates of before that people may still have, where they said something else. */
+    before?: Readonly<Record<string, ExampleLine>>;
+  };
 }
 
 /** A title under which a column may stand. */
@@ -16,7 +20,7 @@ export interface ImportColumnWords {
   titleOf: (column: ImportColumn) => string;
   /** What comes first counts. */
   titles: readonly KnownTitle[];
-  /** Of the templates of every language. */
+  /** Of the templates of every language, also of those of before. */
   examples: readonly ExampleLine[];
 }
 
@@ -32,7 +36,10 @@ export function columnWordsOf(languages: readonly ColumnTexts[]): ImportColumnWo
       ...languages.flatMap((texts) => [...ownTitles(texts), ...otherTitles(texts)]),
       ...IMPORT_COLUMNS.map((column) => [column, column] as const),
     ],
-    examples: languages.flatMap(({ template }) => Object.values(template.lines)),
+    examples: languages.flatMap(({ template }) => [
+      ...Object.values(template.lines),
+      ...Object.values(template.before ?? {}),
+    ]),
   };
 }
 

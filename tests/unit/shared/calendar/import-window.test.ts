@@ -119,7 +119,7 @@ describe('the days of a line', () => {
     const two = line({ bestFrom: 'Pleiades first dawn +1', bestTo: 'Sirius first dawn +1' });
     expect(two.problems).toEqual([{ column: 'bestTo', problem: 'mixed-dates' }]);
     expect(line({ bestFrom: '31.4.', bestTo: 'soon' }).problems).toEqual([
-      { column: 'bestFrom', problem: 'no-such-day' },
+      { column: 'bestFrom', problem: 'no-such-day-4' },
       { column: 'bestTo', problem: 'unknown-sign-words' },
     ]);
   });

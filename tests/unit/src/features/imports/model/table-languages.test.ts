@@ -86,6 +86,14 @@ describe.each(TABLE_LANGUAGES)('a table in %s', (language) => {
     const { lines } = readIn(templateIn(language), 'fr');
     const { examples } = wordsOfTables('fr');
     expect(lines.map((line) => isExample(line, examples))).toEqual([true, true, true]);
+    const [, , close] = lines;
+    if (!close) throw new Error('no third example');
+    const changed = { ...close, cells: { ...close.cells, bestTo: '2027-12-03' } };
+    expect(isExample(changed, examples)).toBe(false);
+    expect(isExample({ ...close, cells: { ...close.cells, titleOfficer: 'Close' } }, examples)).toBe(false);
+    // Templates of before had other words there.
+    const { bestTo } = tableTexts[language].template.before.byTenDays;
+    expect(isExample({ ...close, cells: { ...close.cells, bestTo } }, examples)).toBe(true);
   });
 
   it('names all kinds of events, of work and of signs', () => {
@@ -170,7 +178,7 @@ describe('a day in words', () => {
     ['14th in June', { kind: 'problem', problem: 'unknown-sign-words' }],
     ['3rd June', day(6, 3)],
     ['late June', day(6, 21, 30)],
-    ['31 de junio', { kind: 'problem', problem: 'no-such-day' }],
+    ['31 de junio', { kind: 'problem', problem: 'no-such-day-6' }],
   ])('%j', (text, meant) => {
     expect(dateCell(text, facts)).toEqual(meant);
   });
