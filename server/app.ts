@@ -12,6 +12,7 @@ import { airRoutes } from './features/air/air.routes.js';
 import { AirService } from './features/air/air.service.js';
 import { AttachmentFilesService } from './features/attachments/attachment-files.service.js';
 import { ListedMediaService } from './features/attachments/listed-media.service.js';
+import { ReturningMediaService } from './features/attachments/returning-media.service.js';
 import { AttachmentReadingService } from './features/attachments/attachment-reading.service.js';
 import { AttachmentWordsService } from './features/attachments/attachment-words.service.js';
 import { attachmentsRoutes } from './features/attachments/attachments.routes.js';
@@ -34,6 +35,7 @@ import { ExportsService } from './features/exports/exports.service.js';
 import { FeedsService } from './features/exports/feeds.service.js';
 import { finderRoutes } from './features/finder/finder.routes.js';
 import { FinderService } from './features/finder/finder.service.js';
+import { CarriedMediaService } from './features/imports/carried-media.service.js';
 import { CopyingService } from './features/imports/copying.service.js';
 import { FileImportService } from './features/imports/file-import.service.js';
 import { TableImportService } from './features/imports/table-import.service.js';
@@ -308,10 +310,12 @@ export function createApp(options: AppOptions): App {
   const feeds = new FeedsService(dataSource, clock, contents);
   const media = new ListedMediaService(dataSource, clock, options.storage);
   exportsRoutes(router, mount, new ExportsService(contents, clock, media, dataSource), feeds);
+  const returning = new ReturningMediaService(dataSource, clock, attachmentFiles);
+  const carried = new CarriedMediaService(media, attachmentFiles, returning);
   importsRoutes(mount, {
-    files: new FileImportService(dataSource, clock, options.withdrawals),
+    files: new FileImportService(dataSource, clock, options.withdrawals, carried),
     tables: new TableImportService(dataSource, clock, sky),
-    copying: new CopyingService(dataSource, clock, sky, contents),
+    copying: new CopyingService(dataSource, clock, sky, contents, media),
   });
   openPageRoutes(router, mount, openPageServices(dataSource, clock, contents, config.publicUrl));
   const consents = new ConsentsService(dataSource, clock, proofs);

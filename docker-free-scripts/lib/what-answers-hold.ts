@@ -114,6 +114,11 @@ const BOARD: Holds = { entry: onBoard, 'later entry': both(keptSeen, onBoard) };
 const ONE_CONSENT: Holds = { consent: looked(agreedOn), entry: looked(agreedOn) };
 /** Of voices and pictures a file has a list. */
 const LISTED_FILES: Holds = { recording: onBoard, 'picture title': onBoard };
+const WHOLE_FILE: Holds = {
+  ...{ ...BOARD, variant: both(sees, onBoard), ...LISTED_FILES },
+  // What the year taught, beside entries that are in the file, for those who read drafts.
+  ...{ lesson: both(keptSeen, onBoard), decision: both(keptSeen, onBoard) },
+};
 const TITLED_FILES: Holds = { recording: sees, 'picture title': sees };
 
 /**
@@ -163,11 +168,9 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
   exportCalendarIcs: BOARD,
   // Whole: other timings stand beside their entries, as far as the board may go by them.
   exportCalendarCsv: { ...BOARD, variant: both(sees, onBoard) },
-  exportCalendarJson: {
-    ...{ ...BOARD, variant: both(sees, onBoard), ...LISTED_FILES },
-    // What the year taught, beside entries that are in the file, for those who read drafts.
-    ...{ lesson: both(keptSeen, onBoard), decision: both(keptSeen, onBoard) },
-  },
+  exportCalendarJson: WHOLE_FILE,
+  // The very same file, and the bytes of what it lists.
+  exportCalendarArchive: { ...WHOLE_FILE, sound: onBoard, picture: onBoard },
   // The feed of somebody who sees what the village sees, fetched by whoever has its key.
   readFeed: { entry: (_person, thing) => isOnBoard(thing) },
   // For whoever has the address, of the village or not: what is open, and agreed to be handed on.
@@ -218,6 +221,7 @@ export const HOLDS: Readonly<Record<string, Holds>> = {
 export const HOLDS_NOTHING: Readonly<Record<string, string>> = {
   readTodaysEngine:
     'names entries only where another engine reckoned them; what it reads is cut like a version',
+  readTakeAlong: 'counts voices and pictures that the person knows of, and names none',
   readHealth: 'tells of the machine alone',
   readOpenApi: 'is the contracts',
   readSession: 'names the person and their villages',

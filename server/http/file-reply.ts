@@ -27,6 +27,11 @@ export class StoredFileReply {
   constructor(readonly file: StoredFile) {}
 }
 
+/** An answer that is a file made while it is sent; how large it becomes is known before. */
+export class StreamedFileReply {
+  constructor(readonly file: { content: Readable; bytes: number; fileName: string }) {}
+}
+
 /** RFC 6266: a plain name for old browsers, the real one in UTF-8. */
 export function sendFile(response: Response, endpoint: Endpoint, file: FileReply): void {
   const charset = endpoint.fileType?.startsWith('text/') ? '; charset=utf-8' : '';
@@ -36,6 +41,26 @@ export function sendFile(response: Response, endpoint: Endpoint, file: FileReply
     .setHeader('Content-Disposition', disposition(file.disposition, file.fileName))
     .setHeader('Cache-Control', 'no-store')
     .end(file.content);
+}
+
+/** What breaks in the middle breaks the connection: nobody takes half of it for the whole. */
+export async function sendStreamedFile(
+  request: Request,
+  response: Response,
+  endpoint: Endpoint,
+  { content, bytes, fileName }: StreamedFileReply['file'],
+): Promise<void> {
+  response.status(endpoint.status).set({
+    'Cache-Control': 'private, no-store',
+    'Content-Disposition': disposition('attachment', fileName),
+    'Content-Length': String(bytes),
+    'Content-Type': endpoint.fileType ?? 'application/octet-stream',
+    'X-Content-Type-Options': 'nosniff',
+  });
+  if (request.method === 'HEAD') {
+    content.destroy();
+    response.end();
+  } else await pipeline(content, response).catch(swallowHangUp(response));
 }
 
 /** No cache may hold it, no page may run in it, no browser may guess another type. */

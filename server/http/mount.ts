@@ -9,7 +9,14 @@ import { AppError, notFound } from './app-error.js';
 import { fieldErrors } from './field-errors.js';
 import { actorFor, type HelpingRules } from './on-behalf.js';
 import { EventStreams, StreamReply, type Watched } from './event-streams.js';
-import { FileReply, sendFile, sendStoredFile, StoredFileReply } from './file-reply.js';
+import {
+  FileReply,
+  sendFile,
+  sendStoredFile,
+  sendStreamedFile,
+  StoredFileReply,
+  StreamedFileReply,
+} from './file-reply.js';
 import { PreparedReply } from './reply.js';
 import { sameSession } from './same-session.js';
 import { withUpload, type UploadedFile } from './upload.js';
@@ -21,7 +28,7 @@ type Answer<E extends Endpoint> = E['fileType'] extends string
   ? FileReply
   : E['response'] extends z.ZodType
     ? z.input<E['response']> | PreparedReply
-    : FileReply | StoredFileReply | StreamReply | undefined;
+    : FileReply | StoredFileReply | StreamedFileReply | StreamReply | undefined;
 
 export interface Call<E extends Endpoint> {
   params: Parsed<E['params']>;
@@ -139,7 +146,9 @@ export class Mount {
       this.underway.add(handling);
       const answer = await handling.finally(() => this.underway.delete(handling));
       if (answer instanceof StoredFileReply) await sendStoredFile(request, response, answer.file);
-      else if (answer instanceof StreamReply) this.streams.begin(request, response, answer);
+      else if (answer instanceof StreamedFileReply) {
+        await sendStreamedFile(request, response, endpoint, answer.file);
+      } else if (answer instanceof StreamReply) this.streams.begin(request, response, answer);
       else reply(endpoint, response, answer);
     });
   }

@@ -30,6 +30,17 @@ export type Feed = z.infer<typeof feed>;
 export const madeFeed = feed.extend({ key: z.string() });
 export type MadeFeed = z.infer<typeof madeFeed>;
 
+/** What would go along beside the calendar itself, and what of its voices and pictures stays. */
+export const takeAlong = z.strictObject({
+  voices: z.number().int(),
+  pictures: z.number().int(),
+  /** Of these voices and pictures together. */
+  bytes: z.number().int(),
+  /** Voices and pictures of its entries that the person knows of, and that may not be handed on today. */
+  stays: z.number().int(),
+});
+export type TakeAlong = z.infer<typeof takeAlong>;
+
 const communityParams = z.strictObject({ communityId: id });
 const params = z.strictObject({ calendarId: id, number: versionNumber });
 
@@ -63,6 +74,24 @@ export const exportsEndpoints = {
     access: member('calendar', ...ROLES),
     params,
     fileType: 'application/json',
+  }),
+  takeAlong: defineEndpoint({
+    id: 'readTakeAlong',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/files',
+    summary: 'How many voices and pictures may go along with a version or the draft, and how large they are',
+    access: member('calendar', ...ROLES),
+    params,
+    response: takeAlong,
+  }),
+  archive: defineEndpoint({
+    id: 'exportCalendarArchive',
+    method: 'GET',
+    path: '/api/calendars/:calendarId/versions/:number/calendar.zip',
+    summary: 'The same JSON in a ZIP with the voices and pictures that it lists, named by their checksums',
+    access: member('calendar', ...ROLES),
+    params,
+    fileType: 'application/zip',
   }),
   listFeeds: defineEndpoint({
     id: 'listFeeds',

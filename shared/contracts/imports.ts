@@ -1,16 +1,28 @@
 import { z } from 'zod';
-import { CALENDAR_FILE_MAX_BYTES } from './calendar-file.js';
+import { ATTACHMENT_KINDS } from './attachments.js';
+import { CALENDAR_ARCHIVE_MAX_BYTES } from './calendar-archive.js';
 import { entryLead, entryWarning, entryWindow } from './calendars.js';
 import { id } from './common.js';
 import { defineEndpoint, member } from './endpoint.js';
+
+/** What is the matter with a voice or a picture that should have come along. */
+const MEDIUM_FAULTS = ['missing', 'other-content', 'no-such-file'] as const;
+export type MediumFault = (typeof MEDIUM_FAULTS)[number];
 
 /** What a calendar's own file brought in, or would bring in. */
 export const fileImport = z.strictObject({
   added: z.number().int(),
   /** Taken back since, or kept by their people today, and what hangs on these; how many, and never which. */
   refused: z.number().int(),
-  /** Voices and pictures that the file lists; they stay with the entries to which they were given. */
+  /** Of those that the file lists and that came along with it. */
+  voices: z.number().int(),
+  pictures: z.number().int(),
+  /** All others that it lists: they stay with the entries to which they were given. */
   mediaLeft: z.number().int(),
+  /** Those that should have come and do not fit: as long as there is one, nothing comes in. */
+  unfit: z.array(
+    z.strictObject({ kind: z.enum(ATTACHMENT_KINDS), title: z.string(), fault: z.enum(MEDIUM_FAULTS) }),
+  ),
   /** Lessons and decisions of the year that come along, and those that do not: taken out since, of another year, said already. */
   seasonAdded: z.number().int(),
   seasonLeft: z.number().int(),
@@ -161,6 +173,8 @@ export type CopyNote = (typeof COPY_NOTES)[number];
 
 export const villageCopy = z.strictObject({
   added: z.number().int(),
+  /** Voices and pictures of what comes: they stay, because a voice or a face is a name. */
+  mediaLeft: z.number().int(),
   entries: z.array(
     z.strictObject({
       title: z.string(),
@@ -183,11 +197,12 @@ export const importsEndpoints = {
     id: 'importCalendarFile',
     method: 'POST',
     path: '/api/calendars/:calendarId/imports/file',
-    summary: 'Bring a calendar’s JSON file back into a draft of its village; with dryRun nothing is kept',
+    summary:
+      'Bring a calendar’s own file, alone or with its voices and pictures, back into a draft of its village; with dryRun nothing is kept',
     access: member('calendar', 'officer'),
     params,
     body: z.strictObject({ dryRun: z.boolean() }),
-    upload: { maxBytes: CALENDAR_FILE_MAX_BYTES },
+    upload: { maxBytes: CALENDAR_ARCHIVE_MAX_BYTES },
     response: fileImport,
     countsOnce: true,
   }),

@@ -5,13 +5,13 @@ import type { Entry } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import type { Lesson, SeasonReview } from '#shared/contracts/season-reviews.js';
-import { PlaceEntity } from '#server/db/entities/place.entity.js';
 import { WRITE_KEY_HEADER } from '#shared/contracts/write-key.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
   beginCalendar,
+  beginTwin,
   entriesOf,
   openVillage,
   publishDraft,
@@ -37,11 +37,7 @@ beforeEach(async () => {
   await api.reset();
   village = await openVillage(api);
   fromId = (await beginCalendar(village)).id;
-  // A calendar of the same sky and year: a second place with all that the first has.
-  const places = api.dataSource.getRepository(PlaceEntity);
-  const twinId = randomUUID();
-  await places.insert(Object.assign(await places.findOneByOrFail({ id: village.placeId }), { id: twinId }));
-  intoId = (await beginCalendar({ ...village, placeId: twinId })).id;
+  intoId = (await beginTwin(api, village)).id;
   sow = await addEntry(village.officer, fromId, { giverId: village.elder.personId });
 });
 afterAll(() => api.close());
@@ -158,6 +154,7 @@ describe('a file that comes back', () => {
   it('is tried first without a trace', async () => {
     expect(await bringIn(await exported(fromId), { dryRun: true })).toEqual({
       ...{ added: 1, refused: 0, mediaLeft: 0, seasonAdded: 0, seasonLeft: 0 },
+      ...{ voices: 0, pictures: 0, unfit: [] },
       from: { year: 2027, placeName: 'Upper terraces', label: null },
     });
     expect(await draftOf()).toEqual([]);

@@ -6,6 +6,7 @@ import type { Problem } from '#shared/contracts/problem.js';
 import type { Version } from '#shared/contracts/versions.js';
 import { MembershipEntity } from '#server/db/entities/membership.entity.js';
 import { PlaceEntity } from '#server/db/entities/place.entity.js';
+import { randomUUID } from 'node:crypto';
 import type { Response } from 'supertest';
 import type { Client, TestApi } from './api.js';
 import { withoutSigns } from './event-record.js';
@@ -63,6 +64,15 @@ export async function beginCalendar(village: Village, year = 2027): Promise<Cale
   const { officer, placeId } = village;
   const path = `/api/communities/${officer.communityId}/calendars`;
   return (await officer.post(path, { placeId, year }).expect(201)).body as Calendar;
+}
+
+/** A calendar of the same sky and year: a second place with all that the village's first has. */
+export async function beginTwin({ dataSource }: TestApi, village: Village): Promise<Calendar> {
+  const places = dataSource.getRepository(PlaceEntity);
+  const placeId = randomUUID();
+  const first = await places.findOneByOrFail({ id: village.placeId });
+  await places.insert(Object.assign(first, { id: placeId }));
+  return beginCalendar({ ...village, placeId });
 }
 
 /** Everything said that elders may want to know: such an entry keeps no submission back. */

@@ -1,6 +1,7 @@
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
 import { ENDPOINTS } from '#shared/contracts/index.js';
 import type { Client } from './api.js';
+import { bytesOf } from './bytes-of.js';
 import { readPdfText } from './pdf/read-text.js';
 
 /** What stands for the parameters of paths, and queries to try, by endpoint. */
@@ -25,21 +26,12 @@ export async function textOf(
     // Long lines go on in the next one behind a space.
     return (await client.get(path)).text.replaceAll('\r\n ', '');
   }
+  if (fileType === 'application/zip') return (await bytesOf(client, path)).toString('latin1');
   if (fileType !== 'application/pdf') {
     const { text, body } = (await client.get(path)) as { text: string; body: unknown };
     return Buffer.isBuffer(body) ? body.toString('latin1') : text;
   }
-  const answer = await client
-    .get(path)
-    .buffer(true)
-    .parse((response, done) => {
-      const parts: Buffer[] = [];
-      response.on('data', (part: Buffer) => parts.push(part));
-      response.on('end', () => {
-        done(null, Buffer.concat(parts));
-      });
-    });
-  const file = answer.body as Buffer;
+  const file = await bytesOf(client, path);
   return file.subarray(0, 5).toString() === '%PDF-' ? readPdfText(file) : file.toString();
 }
 

@@ -4,8 +4,8 @@ import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
 import { codeColumn } from './columns.js';
 
 /**
- * The same thing in two years' drafts. The row outlives both: what is taken back in one year goes from every year,
- * also when older tables are put back.
+ * The same thing in two drafts, of two years or brought in a second time. The row outlives both: what is taken back in one
+ * goes from every other, also when older tables are put back.
  */
 @Entity({ name: 'rolled_item' })
 export class RolledItemEntity {
@@ -13,7 +13,7 @@ export class RolledItemEntity {
   itemId!: string;
 
   @Column({ name: 'item_type', ...codeColumn(16) })
-  itemType!: 'entry' | 'variant';
+  itemType!: 'entry' | 'variant' | 'attachment';
 
   @Index('rolled_item_from')
   @Column({ name: 'from_id', type: 'uuid' })
@@ -23,7 +23,7 @@ export class RolledItemEntity {
   @Column({ name: 'calendar_id', type: 'uuid' })
   calendarId!: string;
 
-  /** An entry's days in the year before; no words. Null for a variant, and once the thing was taken back. */
+  /** An entry's days in the year before; no words. Null for everything else, and once the thing was taken back. */
   @Column({ type: 'json', nullable: true })
   before!: EntryDates | null;
 

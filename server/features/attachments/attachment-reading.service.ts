@@ -4,19 +4,13 @@ import type { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import type { Actor } from '../../http/actor.js';
 import { notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import { endingOf } from '../../media/file-endings.js';
 import { recordingsMayBeOpened } from '../../policy/consent-gate.js';
 import { FileNotStored, type ByteRange, type FileStore } from '../../storage/file-store.js';
 import { viewerOf, type Viewer } from '../../policy/viewer.js';
 import { recordKeptReads } from '../audit/kept-reads.service.js';
 import { mayHearConsent } from './attachment-access.service.js';
 import { readable } from './attachments.repository.js';
-
-const ENDINGS: Readonly<Record<string, string>> = {
-  'image/jpeg': 'jpg',
-  'audio/webm': 'webm',
-  'audio/mp4': 'm4a',
-  'audio/ogg': 'ogg',
-};
 
 /** A kept file that somebody may have. */
 interface OpenedFile {
@@ -54,7 +48,7 @@ export class AttachmentReadingService {
       await recordKeptReads(manager, viewer, this.clock.now(), 'attachment', [attachmentId]);
     }
     const { storageKey, bytes, contentType, sha256 } = part;
-    const fileName = `${row.title || row.kind}-${number}.${ENDINGS[contentType] ?? 'bin'}`;
+    const fileName = `${row.title || row.kind}-${number}.${endingOf(contentType)}`;
     return { bytes, contentType, fileName, tag: sha256, open: (range) => this.open(storageKey, range) };
   }
 

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { IsNull, type EntityManager } from 'typeorm';
+import { AttachmentEntity } from '../../db/entities/attachment.entity.js';
 import { ConsentEntity } from '../../db/entities/consent.entity.js';
 import { EntryEntity } from '../../db/entities/entry.entity.js';
 import { settleShownUntil } from '../../policy/consent.repository.js';
@@ -8,16 +9,16 @@ import { lockSharing } from '../../policy/sharing.repository.js';
 import { sameInOtherYears } from '../rollovers/same-things.service.js';
 import { narrowNaming } from './agreed-naming.js';
 
-/** What somebody took back, narrowed or ended about an entry of one year holds for the same entry in every year. */
+/** What somebody took back, narrowed or ended about an entry, a voice or a picture holds for the same one in every draft. */
 export async function holdInOtherYears(manager: EntityManager, said: ConsentEntity): Promise<void> {
   const { itemType } = said;
-  if (itemType !== 'entry') return;
+  if (itemType !== 'entry' && itemType !== 'attachment') return;
   for (const itemId of (await sameInOtherYears(manager, itemType, said.itemId)).toSorted()) {
     await lockSharing(manager, itemType, itemId);
-    const entry = await manager.findOneBy(EntryEntity, { id: itemId });
-    if (entry === null) continue;
+    const entry = itemType === 'entry' ? await manager.findOneBy(EntryEntity, { id: itemId }) : null;
+    if (itemType === 'entry' ? entry === null : !(await isThere(manager, itemId))) continue;
     const known = await theirsAbout(manager, said, itemId);
-    const narrowed = narrowedConsent(known, said, entry.content.kind);
+    const narrowed = narrowedConsent(known, said, entry?.content.kind ?? null);
     if (narrowed !== null) {
       const { recordedBy, recordedAt } = said;
       const changes = { ...narrowed, uses: [...narrowed.uses], recordedBy, recordedAt };
@@ -31,6 +32,10 @@ export async function holdInOtherYears(manager: EntityManager, said: ConsentEnti
     }
     if (said.uses.length > 0) await narrowNaming(manager, { itemType, itemId }, said.details.naming);
   }
+}
+
+async function isThere(manager: EntityManager, attachmentId: string): Promise<boolean> {
+  return manager.existsBy(AttachmentEntity, { id: attachmentId });
 }
 
 function factOf({

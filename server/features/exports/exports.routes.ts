@@ -1,6 +1,6 @@
 import { exportsEndpoints } from '#shared/contracts/exports.js';
 import type { Router } from 'express';
-import { FileReply, StoredFileReply } from '../../http/file-reply.js';
+import { FileReply, StoredFileReply, StreamedFileReply } from '../../http/file-reply.js';
 import { feedLimits } from '../../http/limits.js';
 import type { Mount } from '../../http/mount.js';
 import { wholeList } from '../../http/reply.js';
@@ -28,6 +28,14 @@ export function exportsRoutes(
     const { content, fileName } = await files.json(actor, params.calendarId, params.number);
     return new FileReply(content, fileName);
   });
+  mount.forMember(exportsEndpoints.takeAlong, ({ params }, actor) =>
+    files.takeAlong(actor, params.calendarId, params.number),
+  );
+  mount.forMember(
+    exportsEndpoints.archive,
+    async ({ params }, actor) =>
+      new StreamedFileReply(await files.archive(actor, params.calendarId, params.number)),
+  );
   mount.forMember(exportsEndpoints.listFeeds, async (_call, actor) => wholeList(await feeds.list(actor)));
   mount.forMember(exportsEndpoints.makeFeed, (_call, actor) => feeds.make(actor));
   mount.forMember(exportsEndpoints.endFeed, async ({ params }, actor) => {

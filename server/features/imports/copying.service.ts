@@ -11,6 +11,7 @@ import { inTransaction } from '../../db/in-transaction.js';
 import { hasRole, type Actor } from '../../http/actor.js';
 import { AppError, conflict, notFound } from '../../http/app-error.js';
 import type { Clock } from '../../http/context.js';
+import type { ListedMediaService } from '../attachments/listed-media.service.js';
 import { recordAudit } from '../audit/audit.service.js';
 import { toPlaceSnapshot } from '../places/place-snapshot.service.js';
 import type { SkyDatesService } from '../calendars/sky-dates.service.js';
@@ -30,6 +31,7 @@ export class CopyingService {
     private readonly clock: Clock,
     private readonly sky: SkyDatesService,
     private readonly contents: FrozenContentService,
+    private readonly media: ListedMediaService,
   ) {}
 
   async copy(actor: Actor, calendarId: string, { dryRun, toCalendarId }: Copying): Promise<VillageCopy> {
@@ -43,10 +45,12 @@ export class CopyingService {
       isSameLanguage: header.villageLanguage.tag === village.villageLanguageTag,
     });
     const landing = landingOf(copied);
+    const listed = await this.media.rows(manager, actor.communityId, [...landing.keys()]);
+    const mediaLeft = listed.length;
     const report = await this.report(manager, to, copied, landing);
     if (dryRun) {
       if (to.outNumber !== null) throw new AppError('draft-locked');
-      return { added: landing.size, entries: report };
+      return { added: landing.size, mediaLeft, entries: report };
     }
     const at = this.clock.now();
     const { added } = await inTransaction(this.dataSource, async (within) => {
@@ -56,7 +60,7 @@ export class CopyingService {
       if (landed.isNew) await recordCopied(within, actor, calendarId, landed.added, at);
       return landed;
     });
-    return { added, entries: report };
+    return { added, mediaLeft, entries: report };
   }
 
   /** Whoever is a stranger there learns nothing, also not whether there is such a calendar. */

@@ -1,5 +1,9 @@
 import { seenOf, withSeen } from '#shared/calendar/as-seen.js';
-import type { CalendarFileSeason, ReadableCalendarFile } from '#shared/contracts/calendar-file.js';
+import {
+  CALENDAR_FILE_MAX_BYTES,
+  type CalendarFileSeason,
+  type ReadableCalendarFile,
+} from '#shared/contracts/calendar-file.js';
 import type { EntryInput, EntryLead } from '#shared/contracts/calendars.js';
 import type { FileImport } from '#shared/contracts/imports.js';
 import { PLAIN_DETAILS } from '#shared/contracts/sharing.js';
@@ -25,10 +29,12 @@ import type { IncomingFile } from '../attachments/attachment-files.service.js';
 import { knowsMarker, markerKeyOfLead } from '../calendars/sky-dates.service.js';
 import { figuresSeenBy } from '../figures/village-figures.service.js';
 import { seasonToLand, type SeasonPlan } from '../season-reviews/carried-season.service.js';
+import { isArchive, withCalendarArchive, type CalendarArchive } from './calendar-archive.js';
 import { readCalendarFile } from './calendar-file-reader.js';
+import { countsOf, type CarriedMediaService, type Looked } from './carried-media.service.js';
 import { filePlan, type FilePlan, type KnownToday } from './file-plan.js';
 import { withSignsOfToday } from './village-signs.service.js';
-import { landOnce, seasonCounts } from './landing.service.js';
+import { landOnce, seasonCounts, type LandingEntry } from './landing.service.js';
 
 /** A calendar's own file, back in a draft of its village. */
 export class FileImportService {
@@ -36,6 +42,7 @@ export class FileImportService {
     private readonly dataSource: DataSource,
     private readonly clock: Clock,
     private readonly withdrawals: WithdrawalList,
+    private readonly carried: CarriedMediaService,
   ) {}
 
   async bringIn(
@@ -44,31 +51,68 @@ export class FileImportService {
     { dryRun }: { dryRun: boolean },
     uploaded: IncomingFile,
   ): Promise<FileImport> {
-    const file = readCalendarFile(await readFile(uploaded.path, 'utf8'));
-    const from = {
-      year: file.header.year,
-      placeName: file.header.place.name,
-      label: file.source.label,
-    };
-    // They stay where they were given: a list is no voice.
-    const mediaLeft = 'media' in file ? file.media.length : 0;
-    await this.expectOfVillage(actor, file);
-    const listed = new Set((await this.withdrawals.all()).map(({ itemId }) => itemId));
-    if (dryRun) {
-      const { manager } = this.dataSource;
-      const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
-      if (calendar.outNumber !== null) throw new AppError('draft-locked');
-      const { entries, refused, season } = await this.plan(manager, actor, calendar, file, listed);
-      return { added: entries.length, refused, ...seasonCounts(season), from, mediaLeft };
+    if (await isArchive(uploaded.path)) {
+      return withCalendarArchive(uploaded.path, (archive) => {
+        const brought = { file: readCalendarFile(archive.json), archive, path: uploaded.path };
+        return this.bring(actor, calendarId, dryRun, brought);
+      });
     }
-    const at = this.clock.now();
-    const { isNew: _again, ...counts } = await inTransaction(this.dataSource, (manager) =>
-      landOnce(manager, actor, calendarId, at, async (calendar) => ({
-        ...(await this.plan(manager, actor, calendar, file, listed)),
-        way: 'file',
-      })),
-    );
-    return { ...counts, from, mediaLeft };
+    if (uploaded.bytes > CALENDAR_FILE_MAX_BYTES) {
+      throw new AppError('too-large', { reason: 'file-too-large' });
+    }
+    const file = readCalendarFile(await readFile(uploaded.path, 'utf8'));
+    return this.bring(actor, calendarId, dryRun, { file, archive: null, path: uploaded.path });
+  }
+
+  private async bring(
+    actor: Actor,
+    calendarId: string,
+    dryRun: boolean,
+    brought: Brought,
+  ): Promise<FileImport> {
+    const { file } = brought;
+    await this.expectOfVillage(actor, file);
+    const { manager } = this.dataSource;
+    const listed = new Set((await this.withdrawals.all()).map(({ itemId }) => itemId));
+    const calendar = await manager.findOneByOrFail(CalendarEntity, { id: calendarId });
+    if (dryRun && calendar.outNumber !== null) throw new AppError('draft-locked');
+    const { entries, refused, season } = await this.plan(manager, actor, calendar, file, listed);
+    const { coming, tried, unfit } = await this.look(actor, brought, entries, !dryRun);
+    if (dryRun) {
+      const counts = { added: entries.length, refused, ...seasonCounts(season), ...countsOf(coming) };
+      return toFileImport(file, counts, unfit);
+    }
+    let stood: ReadonlySet<string> = new Set();
+    try {
+      if (unfit.length > 0) throw conflict('files-do-not-fit');
+      const at = this.clock.now();
+      let standing = stood;
+      const { isNew: _again, ...counts } = await inTransaction(this.dataSource, (within) =>
+        landOnce(within, actor, calendarId, at, async (locked) => ({
+          ...(await this.plan(within, actor, locked, file, listed)),
+          way: 'file',
+          media: this.carried.landing(actor, calendarId, coming, (ids) => {
+            standing = ids;
+          }),
+        })),
+      );
+      stood = standing;
+      return toFileImport(file, counts, []);
+    } finally {
+      await this.carried.remove(tried.filter(({ attachmentId }) => !stood.has(attachmentId)));
+    }
+  }
+
+  /** A list alone is no voice: what did not come along stays where it was given. */
+  private async look(
+    actor: Actor,
+    { file, archive, path }: Brought,
+    entries: readonly LandingEntry[],
+    keeps: boolean,
+  ): Promise<Looked> {
+    if (archive === null || !('media' in file)) return { coming: [], tried: [], unfit: [] };
+    const entryIds = entries.flatMap(({ sameAs }) => sameAs ?? []);
+    return this.carried.look(actor, file.media, entryIds, { archive, besidePath: `${path}-unpacked`, keeps });
   }
 
   private async expectOfVillage(
@@ -153,6 +197,25 @@ export class FileImportService {
   }
 }
 
+/** What was sent, as it was read. */
+interface Brought {
+  file: ReadableCalendarFile;
+  /** Null where the calendar came alone. */
+  archive: CalendarArchive | null;
+  path: string;
+}
+
+function toFileImport(
+  file: ReadableCalendarFile,
+  counts: Omit<FileImport, 'from' | 'mediaLeft' | 'unfit'>,
+  unfit: FileImport['unfit'],
+): FileImport {
+  const listed = 'media' in file ? file.media.length : 0;
+  const mediaLeft = listed - counts.voices - counts.pictures - unfit.length;
+  const from = { year: file.header.year, placeName: file.header.place.name, label: file.source.label };
+  return { ...counts, mediaLeft, unfit, from };
+}
+
 const NO_SEASON: CalendarFileSeason = { lessons: [], decisions: [] };
 
 function leftWhole({ lessons, decisions }: CalendarFileSeason): SeasonPlan {
@@ -180,8 +243,8 @@ function unknownHere(content: EntryInput, isMember: ReadonlySet<string>, year: n
 }
 
 /** Its own words about how it is shared follow, so that the next edit does not ask for a wider circle. */
-function sharedAsToday({ sharing, ...content }: EntryInput, { level, details }: Sharing): EntryInput {
-  const isPlain = sharing === undefined && sameJson(details, PLAIN_DETAILS);
+function sharedAsToday(content: EntryInput, { level, details }: Sharing): EntryInput {
+  const isPlain = content.sharing === undefined && sameJson(details, PLAIN_DETAILS);
   return { ...content, sharingLevel: level, ...(isPlain ? {} : { sharing: details }) };
 }
 

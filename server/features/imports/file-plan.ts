@@ -73,12 +73,14 @@ function pointingAnew(
   newIdOf: ReadonlyMap<string, string>,
   newVariantIdOf: ReadonlyMap<string, string>,
 ): EntryInput {
-  const { board, lead, ...rest } = content;
+  const { board, lead } = content;
   const moved = 'entryId' in lead ? { ...lead, entryId: newIdOf.get(lead.entryId) ?? lead.entryId } : lead;
-  const words = { ...rest, lead: moved };
-  if (board === undefined) return words;
-  if (board.variantId === null) return { ...words, board };
+  // Each word stays where it stood: what is exported again is the same, letter by letter.
+  const words = { ...content, lead: moved };
+  if (board === undefined || board.variantId === null) return words;
   const variantId = newVariantIdOf.get(board.variantId);
   // What drove the board is not there any more: the entry's own days do.
-  return variantId === undefined ? words : { ...words, board: { ...board, variantId } };
+  if (variantId !== undefined) return { ...words, board: { ...board, variantId } };
+  const { board: _gone, ...left } = words;
+  return left;
 }

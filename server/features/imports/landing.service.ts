@@ -41,7 +41,15 @@ export interface Landed {
   refused: number;
   seasonAdded: number;
   seasonLeft: number;
+  voices: number;
+  pictures: number;
 }
+
+/** Voices and pictures that came with the entries; how many of them came to stand beside these. */
+export type LandMedia = (
+  manager: EntityManager,
+  entries: readonly LandingEntry[],
+) => Promise<Pick<Landed, 'voices' | 'pictures'>>;
 
 export interface Landing {
   way: ImportWay;
@@ -49,6 +57,7 @@ export interface Landing {
   refused: number;
   /** What the year taught, where entries come in beside which it stands. */
   season?: SeasonPlan;
+  media?: LandMedia;
 }
 
 /**
@@ -67,17 +76,20 @@ export async function landOnce(
     if (calendar.outNumber !== null) throw new AppError('draft-locked');
     const landing = await prepare(calendar);
     await land(manager, actor, calendar, landing, at);
-    const { entries, refused, season } = landing;
+    const { entries, refused, season, media } = landing;
     if (season) await landSeason(manager, season);
+    const stood = media ? await media(manager, entries) : NO_MEDIA;
     return {
       resultId: calendarId,
-      counts: { added: entries.length, refused, ...seasonCounts(season) },
+      counts: { added: entries.length, refused, ...seasonCounts(season), ...stood },
     };
   });
   if (resultId !== calendarId) throw conflict('write-key-used');
   // What was written before there were such counts has none.
-  return { isNew, ...seasonCounts(undefined), ...counts };
+  return { isNew, ...seasonCounts(undefined), ...NO_MEDIA, ...counts };
 }
+
+const NO_MEDIA = { voices: 0, pictures: 0 };
 
 export function seasonCounts(season: SeasonPlan | undefined): Pick<Landed, 'seasonAdded' | 'seasonLeft'> {
   if (season === undefined) return { seasonAdded: 0, seasonLeft: 0 };

@@ -2,13 +2,15 @@ import type { SharedItemType } from '#shared/contracts/sharing.js';
 import { In, type EntityManager } from 'typeorm';
 import { RolledItemEntity } from '../../db/entities/rolled-item.entity.js';
 
-/** Ids of the same thing in the drafts of other years, earlier and later ones; none for what is never rolled over. */
+const DOUBLED: ReadonlySet<SharedItemType> = new Set(['entry', 'variant', 'attachment']);
+
+/** Ids of the same thing in other drafts, earlier and later ones; none for what never stands in two. */
 export async function sameInOtherYears(
   manager: EntityManager,
   itemType: SharedItemType,
   itemId: string,
 ): Promise<string[]> {
-  if (itemType !== 'entry' && itemType !== 'variant') return [];
+  if (!DOUBLED.has(itemType)) return [];
   const known = new Set([itemId]);
   let newest = [itemId];
   while (newest.length > 0) {

@@ -61,12 +61,7 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
       itemType === 'entry' || itemType === 'figure' || itemType === 'note'
         ? attached(await eraseAttachmentsOf(manager, itemType, [itemId]))
         : {},
-    // The same thing in the drafts and versions of other years goes with it.
-    async (manager, { itemType, itemId }) => {
-      const others = await sameInOtherYears(manager, itemType, itemId);
-      await forgetRolledDays(manager, itemId);
-      return { withIt: others.map((id) => ({ itemType, itemId: id })) };
-    },
+    alsoElsewhere,
     only('note', async (manager, { itemId }) => {
       await eraseNote(manager, itemId);
       return {};
@@ -106,12 +101,20 @@ export function erasersOf(files: AttachmentFilesService, clock: Clock): Eraser[]
   ];
   return [
     ...whole.map((erase) => ofPart('all', erase)),
+    ofPart('sound', alsoElsewhere),
     ofPart(
       'sound',
       only('attachment', async (manager, { itemId }) => attached(await eraseSound(manager, itemId))),
     ),
   ];
 }
+
+/** The same thing in other drafts, and in versions of other years, goes with it. */
+const alsoElsewhere: Eraser = async (manager, { itemType, itemId }) => {
+  const others = await sameInOtherYears(manager, itemType, itemId);
+  await forgetRolledDays(manager, itemId);
+  return { withIt: others.map((id) => ({ itemType, itemId: id })) };
+};
 
 function ofPart(part: WithdrawnPart, erase: Eraser): Eraser {
   return (manager, erasing) => (erasing.part === part ? erase(manager, erasing) : Promise.resolve({}));

@@ -13,6 +13,16 @@ export const texts = {
     ics: 'For a telephone’s calendar',
     csv: 'As a table (CSV)',
     json: 'Whole, to bring back in (JSON)',
+    zip: 'Whole, with voices and pictures (ZIP, about {{size}} MB)',
+    voices_one: '{{count}} voice goes along.',
+    voices_other: '{{count}} voices go along.',
+    pictures_one: '{{count}} picture goes along.',
+    pictures_other: '{{count}} pictures go along.',
+    stays_one:
+      '{{count}} voice or picture stays here: it is kept by a few or for its season, or nobody has agreed that it is handed on.',
+    stays_other:
+      '{{count}} voices and pictures stay here: they are kept by a few or for their season, or nobody has agreed that they are handed on.',
+    tooLarge: 'It is larger than what can be brought back in at once (512 MB): keep it as a copy.',
   },
   feeds: {
     title: 'Always fresh on your telephone',

@@ -7,21 +7,24 @@ export const texts = {
   },
   bring: {
     title: 'Bring in',
-    what: 'A table from a spreadsheet (CSV, up to 500 lines), or a calendar that was taken along whole (JSON). Everything lands in this draft, all of it or nothing; nobody has agreed to any of it by that.',
+    what: 'A table from a spreadsheet (CSV, up to 500 lines), or a calendar that was taken along whole (JSON, or ZIP with its voices and pictures). Everything lands in this draft, all of it or nothing; nobody has agreed to any of it by that.',
     template: 'An empty table to fill in',
     templateLanguage: 'Language of the table',
     templateUnread:
       'These words were not yet read by somebody who speaks the language; any column can be matched by hand.',
     file: 'File to bring in',
-    fileHint: 'Ends in .csv or .json. It is looked at first; nothing is kept before you say so.',
+    fileHint: 'Ends in .csv, .json or .zip. It is looked at first; nothing is kept before you say so.',
     locked: 'A submission is out, so the draft is locked. Take it back first.',
     notUtf8:
       'The letters of this file cannot be read. Save it anew as “CSV UTF-8” in the spreadsheet, then choose it again.',
     noLines: 'This table has no lines under its titles.',
     tooMany: 'This table has {{count}} lines, and 500 come in at once. Take it apart into several.',
     tooLarge: 'This file is larger than can be sent. Choose one below 12 MB.',
+    zipTooLarge:
+      'This ZIP is larger than can be sent. Choose one below 512 MB, or bring the JSON in alone, without voices and pictures.',
     looking: 'Looking at it…',
     sending: 'Bringing it in…',
+    onItsWay: '{{sent}} of {{of}} MB are on their way.',
     stop: 'Stop',
     stopped: 'Stopped. If it was on its way already, sending it again brings nothing in twice.',
     again: 'Choose another file',
@@ -78,6 +81,21 @@ export const texts = {
       '{{count}} thing stays out: it was taken back since, or its people keep it today, or it hangs on one of these.',
     refused_other:
       '{{count}} things stay out: they were taken back since, or their people keep them today, or they hang on one of these.',
+    voices_one:
+      '{{count}} voice came along and comes back beside its entry, with who gave it and who may hear it.',
+    voices_other:
+      '{{count}} voices came along and come back beside their entries, with who gave them and who may hear them.',
+    pictures_one: '{{count}} picture came along and comes back beside its entry, with who may see it.',
+    pictures_other:
+      '{{count}} pictures came along and come back beside their entries, with who may see them.',
+    unfitTitle: 'These do not fit, so nothing can come in:',
+    unfit: {
+      missing: '“{{title}}”: its file is not in the ZIP.',
+      'other-content': '“{{title}}”: its file is not the one that was given here.',
+      'no-such-file': '“{{title}}”: its file is no sound and no picture.',
+    },
+    unfitWhat:
+      'Take the calendar along anew, or bring its JSON in alone: then voices and pictures stay where they are.',
     media_one: 'It lists {{count}} voice or picture, which stays with the entry to which it was given.',
     media_other:
       'It lists {{count}} voices and pictures, which stay with the entries to which they were given.',
@@ -102,6 +120,8 @@ export const texts = {
     nothing: 'Nothing of this draft can go along.',
     do_one: 'Copy {{count}} entry',
     do_other: 'Copy {{count}} entries',
+    mediaLeft_one: '{{count}} voice or picture of these stays here: a voice or a face is a name.',
+    mediaLeft_other: '{{count}} voices and pictures of these stay here: a voice or a face is a name.',
     done_one: '{{count}} entry was copied. Consent is to be asked for there.',
     done_other: '{{count}} entries were copied. Consent is to be asked for there.',
     note: {

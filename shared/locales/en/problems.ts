@@ -96,8 +96,10 @@ export const texts = {
       'This file is of another form than is read here. Export it anew, or bring Dawnpeg up to date.',
     'file-changed':
       'This file is not as it was written: a checksum does not fit. Nothing was brought in; export it anew.',
+    'files-do-not-fit':
+      'Voices or pictures of this file are missing or are not as they were given. Nothing was brought in; take the calendar along anew, or bring its JSON in alone.',
     'file-of-other-village':
-      'This file comes from a calendar that is not this village’s. Copying to another village is a way of its own.',
+      'This file comes from a calendar that is not this village’s, so nothing of it comes in, and no voice or face above all. Copying to another village is a way of its own.',
     'too-many-entries': 'A calendar holds at most 500 entries. Take one out first.',
     'order-differs': 'The list has changed meanwhile. Load it again, then set the order.',
     'nothing-to-restore': 'This entry stands in the draft already.',
@@ -106,7 +108,7 @@ export const texts = {
     'members-missing': 'The sign-off rule may name elders of this village only.',
     'letters-off': 'Letters by e-mail are switched off here. Give a code on paper.',
     'file-too-large':
-      'This file is larger than can be sent: 12 MB for a picture, 60 MB for a part of a recording.',
+      'This file is larger than can be sent: 12 MB for a picture or a calendar alone, 60 MB for a part of a recording, 512 MB for a calendar with its voices and pictures.',
     'file-refused': 'The virus scanner does not let this file in. It was not kept.',
     'recording-too-long': 'A recording holds at most 24 parts, two hours of voice. Begin a new one.',
     'part-differs': 'This part has come already with another content. Begin a new recording.',
@@ -316,6 +318,11 @@ export const texts = {
     'direction-missing': 'Say the direction in degrees, such as “Sunrise in the east, at 90°”.',
     'usual-days-missing':
       'Say on which days this sign usually comes, or fill in both the best days and how many days after the sign they are.',
+    'archive-unreadable': 'This ZIP cannot be read, or it is locked. Choose one as it was taken along.',
+    'archive-holds-other':
+      'This ZIP holds something else than a calendar with its voices and pictures. Choose it as it was taken along, with nothing added, renamed or moved.',
+    'archive-too-large':
+      'Unpacked, this ZIP would be larger than a calendar with its voices and pictures may be. Bring its JSON in alone.',
     'not-a-calendar-file': 'This is no calendar file. Choose one that was taken along as “whole (JSON)”.',
     'not-a-picture': 'This is no picture that can be shown here. Choose a JPEG, PNG or WebP.',
     'not-a-recording': 'This is no recording that can be played here. Use WebM, MP4 or Ogg with sound only.',

@@ -2,6 +2,16 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 import { exportsEndpoints } from '#shared/contracts/exports.js';
 import { callApi } from '#src/lib/api-client.js';
 
+/** What would go along with a version or the draft: how much, and how large it is. */
+export function takeAlongQuery(calendarId: string, number: string) {
+  return queryOptions({
+    queryKey: ['take-along', calendarId, number],
+    queryFn: ({ signal }) => callApi(exportsEndpoints.takeAlong, { params: { calendarId, number }, signal }),
+    // Levels, seasons and agreements change from one look to the next.
+    staleTime: 0,
+  });
+}
+
 export function feedsQuery(communityId: string) {
   return queryOptions({
     queryKey: ['feeds', communityId],

@@ -1,4 +1,4 @@
-import { CalendarDays, FileJson, Printer, Table } from 'lucide-react';
+import { CalendarDays, Printer, Table } from 'lucide-react';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { exportsEndpoints } from '#shared/contracts/exports.js';
@@ -7,6 +7,7 @@ import { paths } from '#src/lib/paths.js';
 import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
 import { SelectField } from '#src/ui/field.js';
 import { Board } from '#src/ui/surfaces.js';
+import { TakeWhole } from './take-whole.js';
 
 const REMINDERS = ['none', '0', '1', '3', '7', '14'] as const;
 type Reminder = (typeof REMINDERS)[number];
@@ -62,13 +63,7 @@ export function TakeAlongBoard({ calendarId, number, isPublished }: TakeAlongBoa
         >
           {t('along.csv')}
         </ButtonAnchor>
-        <ButtonAnchor
-          href={apiUrl(exportsEndpoints.json, { params })}
-          download
-          icon={<FileJson aria-hidden size={20} />}
-        >
-          {t('along.json')}
-        </ButtonAnchor>
+        <TakeWhole params={params} />
       </div>
     </Board>
   );

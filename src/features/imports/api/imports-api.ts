@@ -17,14 +17,15 @@ export interface FileSending {
   key: string;
   dryRun: boolean;
   signal: AbortSignal;
+  onProgress: (sentBytes: number, ofBytes: number) => void;
 }
 
 export function useFileImport(calendarId: string) {
   const refresh = useRefresh(calendarId);
   return useMutation({
-    mutationFn: ({ file, key, dryRun, signal }: FileSending): Promise<FileImport> =>
+    mutationFn: ({ file, key, dryRun, signal, onProgress }: FileSending): Promise<FileImport> =>
       uploadToApi(importsEndpoints.file, {
-        ...{ params: { calendarId }, body: { dryRun }, file, signal },
+        ...{ params: { calendarId }, body: { dryRun }, file, signal, onProgress },
         writeKey: dryRun ? undefined : key,
       }),
     onSettled: refresh,

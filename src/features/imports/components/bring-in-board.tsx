@@ -1,12 +1,14 @@
 import { useId, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { Calendar } from '#shared/contracts/calendars.js';
+import { CALENDAR_ARCHIVE_MAX_BYTES } from '#shared/contracts/calendar-archive.js';
 import { CALENDAR_FILE_MAX_BYTES } from '#shared/contracts/calendar-file.js';
 import { IMPORT_LINES_MAX } from '#shared/contracts/imports.js';
 import { paths } from '#src/lib/paths.js';
 import { ButtonLink } from '#src/ui/button.js';
 import { FieldFrame } from '#src/ui/field.js';
 import { Board, Care } from '#src/ui/surfaces.js';
+import { ARCHIVE_BEGINNING_BYTES, beginsAsArchive } from '../model/archive-beginning.js';
 import { readTable, utf8TextOf, type SavedTable } from '../model/read-table.js';
 import { FileImportSteps } from './file-import-steps.js';
 import { TableImportSteps } from './table-import-steps.js';
@@ -48,7 +50,7 @@ export function BringInBoard({ calendar }: { calendar: Calendar }) {
           id={fileId}
           className="inp file-input"
           type="file"
-          accept=".csv,.tsv,.txt,.json,text/csv,application/json"
+          accept=".csv,.tsv,.txt,.json,.zip,text/csv,application/json,application/zip"
           aria-describedby={`${fileId}-hint`}
           onChange={(event) => void choose(event.currentTarget.files?.[0])}
           onClick={(event) => {
@@ -87,7 +89,7 @@ type Unfit = {
   problem: {
     kind: 'problem';
     key: string;
-    word: 'bring.notUtf8' | 'bring.noLines' | 'bring.tooMany' | 'bring.tooLarge';
+    word: 'bring.notUtf8' | 'bring.noLines' | 'bring.tooMany' | 'bring.tooLarge' | 'bring.zipTooLarge';
     count: number;
   };
 };
@@ -98,6 +100,10 @@ async function look(file: File): Promise<Exclude<Chosen, { kind: 'problem' }> | 
   const unfit = (word: Unfit['problem']['word'], count = 0): Unfit => ({
     problem: { kind: 'problem', key, word, count },
   });
+  if (beginsAsArchive(await file.slice(0, ARCHIVE_BEGINNING_BYTES).arrayBuffer())) {
+    // It is sent as it lies on the device: nobody's telephone holds it whole in memory.
+    return file.size > CALENDAR_ARCHIVE_MAX_BYTES ? unfit('bring.zipTooLarge') : { kind: 'file', key, file };
+  }
   if (file.size > CALENDAR_FILE_MAX_BYTES) return unfit('bring.tooLarge');
   const text = utf8TextOf(await file.arrayBuffer());
   if (text === null) return unfit('bring.notUtf8');

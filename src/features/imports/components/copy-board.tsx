@@ -75,6 +75,9 @@ function Copying({ calendar, elsewhere }: { calendar: Calendar; elsewhere: reado
             work={work}
           />
           {look.data && <CopiedTable entries={look.data.entries} year={target.year} />}
+          {look.data && look.data.mediaLeft > 0 && (
+            <p className="text-small">{t('copy.mediaLeft', { count: look.data.mediaLeft })}</p>
+          )}
           {copy.data ? (
             <p role="status">{t('copy.done', { count: copy.data.added })}</p>
           ) : (

@@ -11,17 +11,20 @@ interface LongWorkProps {
   problem: unknown;
   /** What is being done. */
   doing: string;
+  /** How far it is; not told aloud each time it changes. */
+  detail?: string | null;
   work: Stoppable;
 }
 
 /** Work under way with its way out, and what came of it where it did not go through. */
-export function LongWork({ isPending, problem, doing, work }: LongWorkProps) {
+export function LongWork({ isPending, problem, doing, detail = null, work }: LongWorkProps) {
   const { t } = useTranslation('imports');
   const words = useProblemWords();
   if (isPending) {
     return (
       <div className="mt-3 grid gap-2">
         <p role="status">{doing}</p>
+        {detail !== null && <p className="text-small">{detail}</p>}
         <Skeleton lines={2} />
         <Button icon={<Square aria-hidden size={20} />} onClick={work.stop}>
           {t('bring.stop')}
