@@ -95,7 +95,7 @@ describe('a withdrawn entry', () => {
     await addConsent(village.officer, 'entry', entry.id, { uses: [...CONSENT_USES] });
     const before = await placesWith(WORD);
     expect(before.length).toBeGreaterThan(8);
-    const files = ['calendar.ics', 'calendar.csv', 'calendar.json', 'feed.ics', 'open-page'];
+    const files = ['calendar.ics', 'calendar.csv', 'calendar.json', 'calendar.zip', 'feed.ics', 'open-page'];
     for (const file of [...files, 'season-review', 'season-tasks']) {
       expect(before.some((place) => place.includes(file))).toBe(true);
     }
