@@ -59,5 +59,6 @@ export async function copySharing(
   );
   const copy = { itemType, itemId, communityId, level, details, giverId, state, stateAt };
   await manager.insert(ItemSharingEntity, { ...copy, asked: null });
-  if (itemType === 'entry' || itemType === 'attachment') await copyConsents(manager, itemType, fromId, itemId);
+  if (itemType === 'entry' || itemType === 'attachment')
+    await copyConsents(manager, itemType, fromId, itemId);
 }
