@@ -1,6 +1,6 @@
 import { daysBetween, dayNumberFromIso, dayNumberOf } from '../kernel/iso-date.js';
 import type { EntryWindow } from './entry-model.js';
-import { bestDaysWithin } from './overlap.js';
+import { bestDaysWithin, idsOfNested } from './overlap.js';
 import { rainClashOf } from './rain-clash.js';
 
 /*
@@ -46,7 +46,7 @@ export interface AdvisedEntry {
  * much to do at once, so a mere overlap is not spoken of, nor is a watch, which goes on beside other work.
  */
 export function forSamePeople<E extends AdvisedEntry>(entry: E, all: readonly E[]): E[] {
-  const people = plain(entry.content.record?.work.responsible);
+  const people = peopleOf(entry);
   const { window } = entry;
   if (people === '' || window === null || entry.content.protectiveWatch) return [];
   return all.filter(
@@ -54,7 +54,7 @@ export function forSamePeople<E extends AdvisedEntry>(entry: E, all: readonly E[
       other.id !== entry.id &&
       other.window !== null &&
       !other.content.protectiveWatch &&
-      plain(other.content.record?.work.responsible) === people &&
+      peopleOf(other) === people &&
       (bestDaysWithin(window, other.window) || bestDaysWithin(other.window, window)),
   );
 }
@@ -75,13 +75,11 @@ export interface CropClash<E> {
  * only after what was sown last has long been. The length is said at the harvest or at the sowing of the same crop.
  */
 export function cropClash<E extends AdvisedEntry>(harvest: E, all: readonly E[]): CropClash<E> | null {
-  const crop = plain(harvest.content.crop);
+  const crop = cropOf(harvest);
   const { window } = harvest;
-  if (crop === '' || window === null || harvest.content.record?.what.operation !== 'harvest') return null;
+  if (crop === '' || window === null || !isHarvest(harvest)) return null;
   for (const sowing of all) {
-    const operation = sowing.content.record?.what.operation ?? null;
-    if (operation === null || !INTO_THE_GROUND.includes(operation)) continue;
-    if (plain(sowing.content.crop) !== crop || sowing.window === null) continue;
+    if (!isSowing(sowing) || cropOf(sowing) !== crop || sowing.window === null) continue;
     const length = lengthOf(harvest) ?? lengthOf(sowing);
     if (length === null) continue;
     const { fromDays, toDays } = length;
@@ -109,22 +107,20 @@ export interface AdvisedInDraft extends AdvisedEntry {
 
 /**
  * What is told of each entry of a draft from the draft and the place alone, by id: whatever rests on the sky is told apart.
- * Entries are looked at beside those of the same people and of the same crop, so that hundreds take no time.
+ * The same as `forSamePeople` and `cropClash` say of one entry, but no entry is held against every other one: a draft of
+ * hundreds is looked at after each move of a hand.
  */
 export function draftAdvice(
   entries: readonly AdvisedInDraft[],
   rainMonths: readonly boolean[],
 ): Map<string, EntryAdvice[]> {
-  const peopleOf = ({ content }: AdvisedEntry) => plain(content.record?.work.responsible);
-  const cropOf = ({ content }: AdvisedEntry) => plain(content.crop);
-  const byPeople = grouped(entries, peopleOf);
-  const byCrop = grouped(entries, cropOf);
+  const atOnce = idsForSamePeople(entries);
+  const sowings = grouped(entries.filter(isSowing), cropOf);
   return new Map(
     entries.map((entry) => {
-      const beside = byPeople.get(peopleOf(entry)) ?? [];
-      const clash = cropClash(entry, byCrop.get(cropOf(entry)) ?? []);
+      const clash = isHarvest(entry) ? cropClash(entry, sowings.get(cropOf(entry)) ?? []) : null;
       const told: (EntryAdvice | false)[] = [
-        forSamePeople(entry, beside).length > 0 && 'same-people',
+        atOnce.has(entry.id) && 'same-people',
         clash !== null && clash.advice,
         isInCloudySeason(entry.markerRange, rainMonths) && 'cloudy-season',
         lacksSafetyLine(entry) && 'no-safety-line',
@@ -132,6 +128,33 @@ export function draftAdvice(
       return [entry.id, told.filter((one) => one !== false)];
     }),
   );
+}
+
+function idsForSamePeople(entries: readonly AdvisedEntry[]): Set<string> {
+  const timed = entries.flatMap((entry) => {
+    const { id, window, content } = entry;
+    const people = peopleOf(entry);
+    return people === '' || window === null || content.protectiveWatch ? [] : [{ id, window, people }];
+  });
+  const groups = grouped(timed, ({ people }) => people);
+  return new Set([...groups.values()].flatMap((group) => [...idsOfNested(group)]));
+}
+
+function peopleOf({ content }: AdvisedEntry): string {
+  return plain(content.record?.work.responsible);
+}
+
+function cropOf({ content }: AdvisedEntry): string {
+  return plain(content.crop);
+}
+
+function isHarvest({ content }: AdvisedEntry): boolean {
+  return content.record?.what.operation === 'harvest';
+}
+
+function isSowing({ content }: AdvisedEntry): boolean {
+  const operation = content.record?.what.operation ?? null;
+  return operation !== null && INTO_THE_GROUND.includes(operation);
 }
 
 function grouped<E>(entries: readonly E[], keyOf: (entry: E) => string): Map<string, E[]> {

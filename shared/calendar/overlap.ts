@@ -27,17 +27,34 @@ export function overlappingEntryIds(entries: readonly OverlapCandidate[]): Set<s
     if (group) group.push({ id, window });
     else byCrop.set(crop, [{ id, window }]);
   }
+  return new Set([...byCrop.values()].flatMap((group) => [...idsOfNested(group)]));
+}
+
+/**
+ * Ids of those whose best days lie wholly within another one's, or another one's within theirs. Of two windows the one
+ * that begins later lies within the other one if it ends no later: in that order one look from each side is enough.
+ */
+export function idsOfNested(entries: readonly { id: string; window: EntryWindow }[]): Set<string> {
   const found = new Set<string>();
-  for (const group of byCrop.values()) {
-    group.forEach((entry, index) => {
-      for (const other of group.slice(index + 1)) {
-        if (bestDaysWithin(entry.window, other.window) || bestDaysWithin(other.window, entry.window)) {
-          found.add(entry.id).add(other.id);
-        }
-      }
-    });
+  const inOrder = entries.toSorted(
+    (a, b) => compare(a.window.bestFrom, b.window.bestFrom) || compare(b.window.bestTo, a.window.bestTo),
+  );
+  let latestEnd: string | null = null;
+  for (const { id, window } of inOrder) {
+    if (latestEnd !== null && window.bestTo <= latestEnd) found.add(id);
+    if (latestEnd === null || window.bestTo > latestEnd) latestEnd = window.bestTo;
+  }
+  let earliestEnd: string | null = null;
+  for (const { id, window } of inOrder.toReversed()) {
+    if (earliestEnd !== null && window.bestTo >= earliestEnd) found.add(id);
+    if (earliestEnd === null || window.bestTo < earliestEnd) earliestEnd = window.bestTo;
   }
   return found;
+}
+
+function compare(a: string, b: string): number {
+  if (a === b) return 0;
+  return a < b ? -1 : 1;
 }
 
 /** ISO dates of four-digit years sort as text. */

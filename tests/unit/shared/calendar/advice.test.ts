@@ -164,4 +164,41 @@ describe('what is told of a whole draft', () => {
     const told = draftAdvice([inDraft(reap, june), inDraft(burn), inDraft({ ...mend, id: 'm' })], rain);
     expect([...told.values()]).toEqual([['cloudy-season'], ['no-safety-line'], []]);
   });
+
+  it('is of the same people and crop as entry by entry, whichever of many windows lie within each other', () => {
+    // A small fixed series of days, lengths and kinds of work, so that every case comes about.
+    let state = 7;
+    const next = (below: number) => {
+      state = (state * 48_271) % 2_147_483_647;
+      return state % below;
+    };
+    const day = (offset: number) => new Date(Date.UTC(2027, 0, 1 + offset)).toISOString().slice(0, 10);
+    const many = Array.from({ length: 120 }, (_, index) => {
+      const from = next(200);
+      const days = next(9) === 0 ? null : window(day(from), day(from + next(25)));
+      const work = record(
+        ['sow', 'plant', 'harvest', 'weed'][next(4)] ?? null,
+        ['', 'All', 'all ', 'men'][next(4)],
+        60,
+      );
+      const crop = ['', 'Millet', 'millet '][next(3)] ?? '';
+      return inDraft(
+        entry(`e${String(index)}`, days, { crop, protectiveWatch: next(8) === 0, record: work }),
+      );
+    });
+    const told = draftAdvice(many, NO_RAIN);
+    const beside = many.map((one) => [
+      one.id,
+      forSamePeople(one, many).length > 0,
+      cropClash(one, many)?.advice ?? null,
+    ]);
+    expect(
+      many.map(({ id }) => {
+        const of = told.get(id) ?? [];
+        return [id, of.includes('same-people'), of.find((each) => each.startsWith('crop-')) ?? null];
+      }),
+    ).toEqual(beside);
+    expect(new Set(beside.map(([, samePeople]) => samePeople)).size).toBe(2);
+    expect(new Set(beside.map(([, , clash]) => clash)).size).toBe(3);
+  });
 });
