@@ -8,6 +8,7 @@ import { PATTERNS } from '#src/lib/paths.js';
 export interface AppRoute {
   path: string;
   /** Text files the screen reads besides `common` and `problems`. */
+  /** All that its first look says: a text that is missing then draws the whole page once more, for each one anew. */
   texts: readonly Namespace[];
   load: () => Promise<{ Component: ComponentType }>;
   /** Begins to read what the screen shows first, while its code is fetched. */
@@ -24,7 +25,7 @@ export const doorRoutes: readonly AppRoute[] = [
   { path: PATTERNS.privacy, texts: ['privacy'], load: () => import('./routes/privacy.js') },
   {
     path: PATTERNS.openPage,
-    texts: ['open', 'calendars', 'sky'],
+    texts: ['open', 'calendars', 'sky', 'anchors'],
     load: () => import('./routes/open.js'),
   },
   { path: PATTERNS.welcome, texts: ['session'], load: () => import('./routes/welcome.js') },
@@ -41,7 +42,11 @@ export const personRoutes: readonly AppRoute[] = [
 
 /** Screens of the village on screen. A feature adds one line for each of its screens. */
 export const villageRoutes: readonly AppRoute[] = [
-  { path: PATTERNS.today, texts: ['today', 'sky', 'withdrawals'], load: () => import('./routes/today.js') },
+  {
+    path: PATTERNS.today,
+    texts: ['today', 'sky', 'withdrawals', 'weather'],
+    load: () => import('./routes/today.js'),
+  },
   { path: PATTERNS.look, texts: ['look', 'sky'], load: () => import('./routes/look.js') },
   { path: PATTERNS.stars, texts: ['stars', 'sky'], load: () => import('./routes/stars.js') },
   { path: PATTERNS.moons, texts: ['moons', 'sky'], load: () => import('./routes/moons.js') },
@@ -107,7 +112,22 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.calendar,
-    texts: ['calendars', 'versions', 'season', 'sky', 'attachments', 'notes', 'sharing', 'consents'],
+    texts: [
+      'calendars',
+      'anchors',
+      'strip',
+      'record',
+      'words',
+      'signs',
+      'variants',
+      'versions',
+      'season',
+      'sky',
+      'attachments',
+      'notes',
+      'sharing',
+      'consents',
+    ],
     load: () => import('./routes/calendar.js'),
     askEarly: async (client, { calendarId = '' }) => {
       const { askEarly } = await import('#src/features/calendars/api/ask-early.js');
@@ -124,6 +144,7 @@ export const villageRoutes: readonly AppRoute[] = [
     texts: [
       'versions',
       'calendars',
+      'anchors',
       'reviews',
       'places',
       'sky',
@@ -138,12 +159,12 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.compare,
-    texts: ['versions', 'calendars', 'sky', 'moves'],
+    texts: ['versions', 'calendars', 'anchors', 'sky', 'moves'],
     load: () => import('./routes/compare.js'),
   },
   {
     path: PATTERNS.rollover,
-    texts: ['rollovers', 'calendars', 'sky', 'moves'],
+    texts: ['rollovers', 'calendars', 'anchors', 'sky', 'moves'],
     load: () => import('./routes/rollover.js'),
   },
   {
@@ -153,12 +174,12 @@ export const villageRoutes: readonly AppRoute[] = [
   },
   {
     path: PATTERNS.moves,
-    texts: ['imports', 'exports', 'files', 'calendars', 'sky'],
+    texts: ['imports', 'exports', 'files', 'calendars', 'anchors', 'sky'],
     load: () => import('./routes/moves.js'),
   },
   {
     path: PATTERNS.longLook,
-    texts: ['decades', 'calendars', 'sky'],
+    texts: ['decades', 'calendars', 'anchors', 'sky'],
     load: () => import('./routes/long-look.js'),
   },
   { path: PATTERNS.sheet, texts: ['sheets'], load: () => import('./routes/sheet.js') },

@@ -1,3 +1,4 @@
+import type { EntryLead } from '#shared/contracts/calendars.js';
 import { In, IsNull, type EntityManager } from 'typeorm';
 import { CalendarVersionEntity } from '../../db/entities/calendar-version.entity.js';
 import { CalendarEntity } from '../../db/entities/calendar.entity.js';
@@ -33,14 +34,20 @@ export async function draftThings(
   manager: EntityManager,
   calendarIds: readonly string[],
 ): Promise<Map<string, SeenThing[]>> {
-  const rows = await manager.find(EntryEntity, {
-    where: { calendarId: In([...calendarIds]), deletedAt: IsNull() },
-    select: { id: true, calendarId: true, content: true },
-  });
+  if (calendarIds.length === 0) return new Map();
+  const rows = await manager
+    .createQueryBuilder(EntryEntity, 'entry')
+    .select('entry.id', 'id')
+    .addSelect('entry.calendarId', 'calendarId')
+    // A whole entry is some thousands of letters long, and here hundreds of them are only counted.
+    .addSelect("JSON_EXTRACT(entry.content, '$.lead')", 'lead')
+    .where('entry.calendarId IN (:...calendarIds)', { calendarIds })
+    .andWhere('entry.deletedAt IS NULL')
+    .getRawMany<{ id: string; calendarId: string; lead: string }>();
   return grouped(
-    rows.map(({ id, calendarId, content }) => [
+    rows.map(({ id, calendarId, lead }) => [
       calendarId,
-      { entryId: id, markerKey: markerKeyOfLead(content.lead) },
+      { entryId: id, markerKey: markerKeyOfLead(JSON.parse(lead) as EntryLead) },
     ]),
   );
 }

@@ -9,9 +9,14 @@ import { starTable } from '#tests/support/stars-of-tazimel.js';
 
 const { draft, server, calendarPath } = draftServer(await tazimelMarkers(), await starTable(YEAR));
 
+/** A village besides the one that the calendar is of. */
+const OTHER = { communityId: '0f0f0f0f-0f0f-4f0f-8f0f-0f0f0f0f0f0f' };
+
 /** What is asked for when somebody with this role opens the draft. */
-async function asked(role: Role): Promise<string[]> {
-  const memberships = OFFICER.memberships?.map((each) => ({ ...each, roles: [role] })) ?? null;
+async function asked(role: Role, elsewhere: Role[] = []): Promise<string[]> {
+  const here = OFFICER.memberships?.slice(0, 1).map((each) => ({ ...each, roles: [role] })) ?? [];
+  const others = elsewhere.flatMap((other) => here.map((each) => ({ ...each, ...OTHER, roles: [other] })));
+  const memberships = [...here, ...others];
   const log = answerWith({ ...server(draft({})), 'GET /api/session': { ...OFFICER, memberships } });
   await askEarly(testQueryClient(), CALENDAR.id);
   return log.map(({ path }) => path);
@@ -29,7 +34,17 @@ describe('what a draft shows first', () => {
     expect(first).toBe(`${calendarPath}/entries`);
   });
 
+  it('does not wait for whose calendar it is where somebody reads drafts in each of their villages', async () => {
+    const paths = await asked('officer');
+    expect(paths.slice(0, 3)).toEqual([calendarPath, '/api/session', `${calendarPath}/entries`]);
+  });
+
+  it('waits for it where they read drafts in one village and not in another', async () => {
+    expect(await asked('officer', ['observer'])).toContain(`${calendarPath}/entries`);
+    expect(await asked('observer', ['officer'])).not.toContain(`${calendarPath}/entries`);
+  });
+
   it('is not asked for by who may not read drafts', async () => {
-    expect(await asked('observer')).toEqual(['/api/session', calendarPath]);
+    expect(await asked('observer')).toEqual([calendarPath, '/api/session']);
   });
 });
