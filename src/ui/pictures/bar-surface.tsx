@@ -37,8 +37,10 @@ interface BarSurfaceProps {
   span: DaySpan;
   pxPerDay: number;
   barHeightPx: number;
-  /** In the order in which keys go from one to the next. */
+  /** In an order that stays while they are moved. */
   bars: readonly SurfaceBar[];
+  /** In which the keys up and down go from one bar to the next. */
+  keyOrder: readonly string[];
   chosen: string | null;
   moves: BarMoves;
   onOpen: (key: string) => void;
@@ -51,7 +53,8 @@ const TARGET = 24;
  * Lies over the bars: drag one whole or by an end, or go from bar to bar with the keys up and down, move by a day with left
  * and right, by ten with Shift, and open with Enter. The chosen one has rings at its ends for keys.
  */
-export function BarSurface({ span, pxPerDay, barHeightPx, bars, chosen, moves, onOpen }: BarSurfaceProps) {
+export function BarSurface(props: BarSurfaceProps) {
+  const { span, pxPerDay, barHeightPx, bars, keyOrder, chosen, moves, onOpen } = props;
   const box = useRef<HTMLDivElement>(null);
   const [stop, setStop] = useState<string | null>(null);
   const { drag, cancel, handlers } = useDayDrag({
@@ -59,22 +62,22 @@ export function BarSurface({ span, pxPerDay, barHeightPx, bars, chosen, moves, o
     onTap: onOpen,
   });
   // One of them all is in the order of the Tab key; the arrow keys lead on from it.
-  const tabStop = [stop, chosen].find((key) => bars.some((bar) => bar.key === key)) ?? bars[0]?.key;
+  const tabStop = [stop, chosen].find((key) => bars.some((bar) => bar.key === key)) ?? keyOrder[0];
   const goTo = (key: string | undefined) => {
     if (key === undefined) return;
     setStop(key);
     box.current?.querySelector<HTMLElement>(`[data-bar="${key}"]`)?.focus();
   };
   const onKeyDown = (event: KeyboardEvent<HTMLElement>, key: string, part: MovePart) => {
-    const at = bars.findIndex((bar) => bar.key === key);
+    const at = keyOrder.indexOf(key);
     const days = daysOfKey(event.key, event.shiftKey);
     if (event.key === 'Escape') cancel();
     else if (days !== null && moves.mayMove(key)) moves.onMove(key, part, days);
     else if (event.key === 'Enter' || event.key === ' ') onOpen(key);
-    else if (event.key === 'ArrowDown') goTo(bars[at + 1]?.key);
-    else if (event.key === 'ArrowUp') goTo(bars[at - 1]?.key);
-    else if (event.key === 'Home') goTo(bars[0]?.key);
-    else if (event.key === 'End') goTo(bars.at(-1)?.key);
+    else if (event.key === 'ArrowDown') goTo(keyOrder[at + 1]);
+    else if (event.key === 'ArrowUp') goTo(keyOrder[at - 1]);
+    else if (event.key === 'Home') goTo(keyOrder[0]);
+    else if (event.key === 'End') goTo(keyOrder.at(-1));
     else if (event.key === '+' || event.key === '=') moves.onZoom?.(1);
     else if (event.key === '-') moves.onZoom?.(-1);
     else return;

@@ -76,7 +76,6 @@ export function YearBoard(props: YearBoardProps) {
   const textWidth = useTextWidth(LABEL_SIZE);
   const pxPerDay = width / (span.last - span.first + 1);
   const labelMax = Math.max(LABEL_LEAST, width * LABEL_SHARE_MAX);
-  const byKey = useMemo(() => new Map(bars.map((bar) => [bar.key, bar])), [bars]);
   const placed = useMemo(
     () => packBars(barsToPlace({ bars, span, pxPerDay, labelMax, textWidth }), width),
     [bars, span, pxPerDay, labelMax, textWidth, width],
@@ -88,19 +87,17 @@ export function YearBoard(props: YearBoardProps) {
   const rows = Math.max(1, ...placed.map(({ row }) => row + 1));
   const height = barsTop + rows * BAR_PITCH + 4;
   const barY = (bar: PlacedBar) => barsTop + bar.row * BAR_PITCH;
-  const barOf = (key: string) => byKey.get(key);
-  const chosenPlace = placed.find(({ key }) => key === chosen);
-  const chosenBar = chosenPlace === undefined ? undefined : barOf(chosenPlace.key);
+  const drawn = useMemo(() => inOrderOfBars(bars, placed), [bars, placed]);
+  const chosenOne = drawn.find(({ bar }) => bar.key === chosen);
   const surface = useMemo(
     () =>
-      placed.flatMap(({ key, row }): SurfaceBar[] => {
-        const bar = byKey.get(key);
-        if (bar === undefined) return [];
-        const { name, days, kind } = bar;
-        return [{ key, name, days, kind, topPx: barsTop + row * BAR_PITCH }];
-      }),
-    [placed, byKey, barsTop],
+      drawn.map(({ bar: { key, name, days, kind }, place: { row } }): SurfaceBar => ({
+        ...{ key, name, days, kind },
+        topPx: barsTop + row * BAR_PITCH,
+      })),
+    [drawn, barsTop],
   );
+  const keyOrder = useMemo(() => placed.map(({ key }) => key), [placed]);
   const lines = useMemo(
     () => months.filter(({ days, narrow }) => days * pxPerDay >= LINES_APART || narrow !== ''),
     [months, pxPerDay],
@@ -147,36 +144,31 @@ export function YearBoard(props: YearBoardProps) {
           </div>
         ))}
         <svg className="year-board-over" role="img" aria-label={label} width="100%" height={height}>
-          {chosenPlace && (
+          {chosenOne && (
             <rect
               className="year-board-chosen"
-              x={chosenPlace.fromPx - 6}
-              y={barY(chosenPlace) - 6}
-              width={chosenPlace.toPx - chosenPlace.fromPx + 12}
+              x={chosenOne.place.fromPx - 6}
+              y={barY(chosenOne.place) - 6}
+              width={chosenOne.place.toPx - chosenOne.place.fromPx + 12}
               height={BAR_PITCH + 1}
             />
           )}
-          {placed.map((place) => {
-            const bar = barOf(place.key);
-            return (
-              bar && (
-                <WindowShape
-                  key={place.key}
-                  span={span}
-                  days={bar.days}
-                  kind={bar.kind}
-                  y={barY(place)}
-                  height={BAR_HEIGHT}
-                />
-              )
-            );
-          })}
-          {pairing && pairedLane >= 0 && chosenPlace && chosenBar && (
+          {drawn.map(({ bar, place }) => (
+            <WindowShape
+              key={bar.key}
+              span={span}
+              days={bar.days}
+              kind={bar.kind}
+              y={barY(place)}
+              height={BAR_HEIGHT}
+            />
+          ))}
+          {pairing && pairedLane >= 0 && chosenOne && (
             <Pairing
               x={percent(startPercent(pairing.dayNumber + 0.5, span))}
               fromY={lanesTop + pairedLane * LANE_PITCH + 2}
-              toX={percent(startPercent(nearestDay(chosenBar.days, pairing.dayNumber), span))}
-              toY={barY(chosenPlace) + BAR_HEIGHT / 2}
+              toX={percent(startPercent(nearestDay(chosenOne.bar.days, pairing.dayNumber), span))}
+              toY={barY(chosenOne.place) + BAR_HEIGHT / 2}
             />
           )}
           {hasPeg && (
@@ -193,28 +185,24 @@ export function YearBoard(props: YearBoardProps) {
             </>
           )}
         </svg>
-        {placed.map((place) => {
-          const bar = barOf(place.key);
-          return (
-            bar && (
-              <BarName
-                key={place.key}
-                barKey={place.key}
-                name={bar.name}
-                isChosen={place.key === chosen}
-                maxWidthPx={labelMax}
-                leftPx={place.labelStartPx}
-                topPx={barY(place) + BAR_HEIGHT + 2}
-                onChoose={onChoose}
-              />
-            )
-          );
-        })}
+        {drawn.map(({ bar, place }) => (
+          <BarName
+            key={bar.key}
+            barKey={bar.key}
+            name={bar.name}
+            isChosen={bar.key === chosen}
+            maxWidthPx={labelMax}
+            leftPx={place.labelStartPx}
+            topPx={barY(place) + BAR_HEIGHT + 2}
+            onChoose={onChoose}
+          />
+        ))}
         {moves && onChoose && (
           <BarSurface
             {...{ span, pxPerDay, moves }}
             barHeightPx={BAR_HEIGHT}
             bars={surface}
+            keyOrder={keyOrder}
             chosen={chosen ?? null}
             onOpen={onChoose}
           />
@@ -222,6 +210,23 @@ export function YearBoard(props: YearBoardProps) {
       </div>
     </div>
   );
+}
+
+interface DrawnBar {
+  bar: BoardBar;
+  place: PlacedBar;
+}
+
+/**
+ * The bars that have a place, in their own order. In that of their days a bar that was moved past another would be taken
+ * out of the page and put back, and the handle in somebody's hand would lose the focus.
+ */
+function inOrderOfBars(bars: readonly BoardBar[], placed: readonly PlacedBar[]): DrawnBar[] {
+  const places = new Map(placed.map((place) => [place.key, place]));
+  return bars.flatMap((bar) => {
+    const place = places.get(bar.key);
+    return place === undefined ? [] : [{ bar, place }];
+  });
 }
 
 interface ToPlace {
