@@ -1,11 +1,14 @@
 import { readFile } from 'node:fs/promises';
+import type { CalendarFile } from '#shared/contracts/calendar-file.js';
 import type { Calendar } from '#shared/contracts/calendars.js';
 import { expect, test } from '#tests/support/journey.js';
+import { addPictureTo } from '#tests/support/journey-media.js';
 import { expectAccessible, expectNoSidewaysScroll, signIn } from '#tests/support/journey-steps.js';
+import { unzipped, zipped } from '#tests/support/zip.js';
 
 /*
  * The officer brings last year's spreadsheet in on a phone: a column is matched by hand, a line is put right, the network
- * goes in the middle, and nothing comes twice. Then a calendar that was taken along whole comes back.
+ * goes in the middle, and nothing comes twice. Then a calendar that was taken along whole comes back, with a picture.
  */
 test.use({ viewport: { width: 320, height: 740 }, hasTouch: true, expectedNoise: [/ERR_FAILED|404|409/u] });
 
@@ -35,8 +38,8 @@ test('the officer brings a table in, line by line looked at, and a calendar’s 
   expect(spanish.suggestedFilename()).toBe('dawnpeg-tabla.csv');
   const [spanishTitles = ''] = (await readFile(await spanish.path(), 'utf8')).split('\r\n');
 
-  const choose = (name: string, text: string) =>
-    bring.getByLabel('File to bring in').setInputFiles({ name, mimeType: '', buffer: Buffer.from(text) });
+  const choose = (name: string, content: string | Buffer) =>
+    bring.getByLabel('File to bring in').setInputFiles({ name, mimeType: '', buffer: Buffer.from(content) });
   const table = (day: string) =>
     [
       ...['Work;type;When;days;from', `Bind sheaves;farm;Pleiades, first morning;${day};`],
@@ -93,8 +96,17 @@ test('the officer brings a table in, line by line looked at, and a calendar’s 
   const file = await (await page.request.get(`${version}/calendar.json`)).text();
   await choose('calendar.json', file.replace('"farm"', '"household"'));
   await expect(bring.getByText(/a checksum does not fit/u)).toBeVisible();
-  await choose('calendar.json', file);
+
+  await addPictureTo(page, JSON.parse(file) as CalendarFile, 'Sow short millet');
+  const zip = await (await page.request.get(`${version}/calendar.zip`)).body();
+  const others = (await unzipped(zip)).filter(({ path }) => !path.startsWith('files/'));
+  await choose('calendar.zip', await zipped(others));
+  await expect(bring.getByText('“A handful”: its file is not in the ZIP.')).toBeVisible();
+  await expectAccessible(page);
+  await expect(bring.getByRole('button', { name: /^Bring \d+ entries in$/u })).toHaveCount(0);
+  await choose('calendar.zip', zip);
   await expect(bring.getByText(/^\d+ entries would come in\.$/u)).toBeVisible();
+  await expect(bring.getByText(/^1 picture came along/u)).toBeVisible();
   await expectNoSidewaysScroll(page);
   await bring.getByRole('button', { name: /^Bring \d+ entries in$/u }).click();
   await expect(bring.getByText(/^\d+ entries were brought in/u)).toBeVisible();
