@@ -2,7 +2,7 @@
  * How a calendar stands in a table: one line an entry, and behind it one for each other keeper's timing of it, under one
  * line of titles. Every line has a number, by which others of the same table name it: `leadEntry` the entry from which days
  * are counted, `variantOf` the entry whose timing this is, `boardVariant` the timing that drives the board. Whoever writes such a file and whoever
- * reads one go by this list; titles are words of a language (`files`, `calendarCsv.column.<id>`), ids never change.
+ * reads one go by this list; titles are words of a language (`tables.ts`, `column.<id>`), ids never change.
  *
  * - `text`: words as they are; what a spreadsheet would run as a formula has an apostrophe in front (`csvText` puts it
  *   there, `csvWords` takes it off), numbers such as -5 have none

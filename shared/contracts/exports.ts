@@ -12,8 +12,15 @@ export const icsQuery = z.strictObject({
 });
 export type IcsQuery = z.infer<typeof icsQuery>;
 
+/** Languages in which tables are written. */
+export const CSV_LANGUAGES = ['en', 'es', 'fr', 'pt', 'sw'] as const;
+
 /** `mark` puts the sign of UTF-8 in front, by which spreadsheets read letters of all scripts. */
-export const csvQuery = z.strictObject({ mark: z.enum(['yes', 'no']).default('yes') });
+export const csvQuery = z.strictObject({
+  mark: z.enum(['yes', 'no']).default('yes'),
+  /** Of the titles of its columns and of what it says about the file; codes are the same in all. */
+  language: z.enum(CSV_LANGUAGES).default('en'),
+});
 export type CsvQuery = z.infer<typeof csvQuery>;
 
 /** Addresses that one person has in one village, for as many devices. */

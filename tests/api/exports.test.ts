@@ -9,6 +9,8 @@ import { csvText, csvWords } from '#shared/kernel/csv.js';
 import { en } from '#shared/locales/index.js';
 import type { Entry } from '#shared/contracts/calendars.js';
 import type { Version } from '#shared/contracts/versions.js';
+import { TABLE_LANGUAGES } from '#shared/locales/table-languages.js';
+import { tableTexts } from '#shared/locales/tables.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
 import {
   addEntry,
@@ -207,6 +209,21 @@ describe('CSV', () => {
       ...{ leadType: 'fixed-date', leadDate: '12-28', leadSource: 'Water committee' },
       ...{ protectiveWatch: 'yes', earliestDays: '0' },
     });
+  });
+
+  it('is titled in the language that is asked for; what stands in the lines is the same', async () => {
+    const csv = (language: string) =>
+      textOf(village.officer, 'draft', `calendar.csv?mark=no&language=${language}`);
+    const [, ...english] = Papa.parse<string[]>(await csv('en')).data;
+    const about = CALENDAR_CSV_COLUMNS.flatMap(({ part }, index) => (part === 'about' ? [index] : []));
+    const plain = (lines: string[][]) => lines.map((line) => line.filter((_, at) => !about.includes(at)));
+    for (const language of TABLE_LANGUAGES) {
+      const { column, file } = tableTexts[language];
+      const [titles, ...lines] = Papa.parse<string[]>(await csv(language)).data;
+      expect(titles).toEqual(CALENDAR_CSV_COLUMNS.map(({ id }) => column[id]));
+      expect(plain(lines)).toEqual(plain(english));
+      expect(lines[0]).toEqual(expect.arrayContaining([file.state.draft, file.caution]));
+    }
   });
 
   it('runs no formula in a spreadsheet and leaves numbers alone', async () => {

@@ -4,8 +4,8 @@ import { GIVER_BY_ROLE } from '#shared/contracts/sharing.js';
 import type { SeenVariant, VersionEntryBody } from '#shared/contracts/versions.js';
 import { canonicalJson } from '#shared/kernel/canonical-json.js';
 import { csvText, type CsvCell } from '#shared/kernel/csv.js';
-import { DEFAULT_LANGUAGE } from '#shared/locales/languages.js';
-import { translatorFor, type Translate } from '../../print/translator.js';
+import type { TableLanguage } from '#shared/locales/table-languages.js';
+import { tableTexts } from '#shared/locales/tables.js';
 import type { CalendarContent } from '../versions/frozen-content.service.js';
 import { monthDay, recordCells } from './record-cells.js';
 
@@ -14,6 +14,7 @@ const UTF8_MARK = '\ufeff';
 
 export interface CsvOptions {
   mark: boolean;
+  language: TableLanguage;
   /** For whoever compiles, reviews and signs. */
   levels: boolean;
 }
@@ -24,29 +25,32 @@ type Line = Record<CalendarCsvColumn, CsvCell>;
  * A calendar as a table that can be read back: a line an entry and one for each other timing beside it, the columns of
  * `csv-columns.ts`. Lines name each other by number, for ids mean nothing in a table.
  */
-export function calendarCsv(content: CalendarContent, { mark, levels }: CsvOptions): string {
-  const t = translatorFor(DEFAULT_LANGUAGE, 'files');
+export function calendarCsv(content: CalendarContent, { mark, language, levels }: CsvOptions): string {
+  const { column, file: words } = tableTexts[language];
   const things = content.entries.flatMap(({ entryId, variants = [] }) => [
     entryId,
     ...variants.map(({ variantId }) => variantId),
   ]);
   const numberOf = new Map(things.map((id, index) => [id, index + 1]));
-  const facts = { content, levels, t, numberOf: (id: string) => numberOf.get(id) ?? null };
+  const facts = { content, levels, words, numberOf: (id: string) => numberOf.get(id) ?? null };
   const lines = content.entries.flatMap((entry) => [
     entryLine(entry, facts),
     ...(entry.variants ?? []).map((variant) => variantLine(entry, variant, facts)),
   ]);
   const rows = [
-    CALENDAR_CSV_COLUMNS.map(({ id }) => t(`calendarCsv.column.${id}`)),
+    CALENDAR_CSV_COLUMNS.map(({ id }) => column[id]),
     ...lines.map((line) => CALENDAR_CSV_COLUMNS.map(({ id }) => line[id])),
   ];
   return (mark ? UTF8_MARK : '') + csvText(rows);
 }
 
+/** What a table says about itself. */
+type FileWords = (typeof tableTexts)[TableLanguage]['file'];
+
 interface Facts {
   content: CalendarContent;
   levels: boolean;
-  t: Translate;
+  words: FileWords;
   numberOf: (id: string) => number | null;
 }
 
@@ -66,7 +70,7 @@ function entryLine({ entryId, content, dates }: VersionEntryBody, facts: Facts):
     lastDateSource: content.lastDate && content.lastDate.source,
     protectiveWatch: content.protectiveWatch ? 'yes' : 'no',
     ...(content.record && recordCells(content.record)),
-    giver: giverCell(content.giver, facts.t),
+    giver: giverCell(content.giver, facts.words),
     ...(board && {
       ...{ boardShows: board.shows, boardReason: board.reason },
       boardVariant: board.variantId === null ? null : numberOf(board.variantId),
@@ -87,7 +91,7 @@ function variantLine(entry: VersionEntryBody, variant: SeenVariant, facts: Facts
     ...dayCells(dates),
     ...leadCells(content.lead, facts.numberOf),
     ...content.offsets,
-    giver: giverCell(content.giver, facts.t),
+    giver: giverCell(content.giver, facts.words),
     variantOf: facts.numberOf(entry.entryId),
     ...{ variantDifference: difference, variantConfidence: confidence, variantBasis: basis },
   };
@@ -95,14 +99,17 @@ function variantLine(entry: VersionEntryBody, variant: SeenVariant, facts: Facts
 
 const NOTHING = Object.fromEntries(CALENDAR_CSV_COLUMNS.map(({ id }) => [id, null])) as Line;
 
-function aboutCells({ content: { header, label, state }, levels, t }: Facts, level: string): Partial<Line> {
-  const stateWord = t(`ics.state.${state ?? 'draft'}`);
+function aboutCells(
+  { content: { header, label, state }, levels, words }: Facts,
+  level: string,
+): Partial<Line> {
+  const stateWord = words.state[state ?? 'draft'];
   return {
     level: levels ? level : null,
     year: header.year,
     place: header.place.name,
     issue: label === null ? stateWord : [label, stateWord].join(', '),
-    care: t('caution'),
+    care: words.caution,
   };
 }
 
@@ -146,6 +153,6 @@ function leadCells(lead: EntryLead, numberOf: Facts['numberOf']): Partial<Line> 
   }
 }
 
-function giverCell(giver: string, t: Translate): string {
-  return giver === GIVER_BY_ROLE ? t('sheet.byRole') : giver;
+function giverCell(giver: string, { byRole }: FileWords): string {
+  return giver === GIVER_BY_ROLE ? byRole : giver;
 }

@@ -33,9 +33,14 @@ export class ExportsService {
     return { content: calendarIcs(content, query.alarmDays ?? null), fileName: nameOf(content, 'ics') };
   }
 
-  async csv(actor: Actor, calendarId: string, number: string, { mark }: CsvQuery): Promise<ExportedFile> {
+  async csv(
+    actor: Actor,
+    calendarId: string,
+    number: string,
+    { mark, language }: CsvQuery,
+  ): Promise<ExportedFile> {
     const content = await this.contents.readForUse(actor, calendarId, number, 'feed');
-    const text = calendarCsv(content, { mark: mark === 'yes', levels: seesDrafts(actor) });
+    const text = calendarCsv(content, { mark: mark === 'yes', language, levels: seesDrafts(actor) });
     return { content: text, fileName: nameOf(content, 'csv') };
   }
 

@@ -12,6 +12,8 @@ export const texts = {
     daysAhead_other: '{{count}} days ahead',
     ics: 'For a telephone’s calendar',
     csv: 'As a table (CSV)',
+    csvLanguage: 'Language of the table’s titles',
+    csvUnread: 'These words were not yet read by somebody who speaks the language.',
     json: 'Whole, to bring back in (JSON)',
     zip: 'Whole, with voices and pictures (ZIP, about {{size}} MB)',
     voices_one: '{{count}} voice goes along.',

@@ -2,7 +2,6 @@ import { texts as files } from './files.js';
 
 /** English texts of tables to be filled in: titles of columns, lines that show how, and words by which a table may say things. */
 export const texts = {
-  language: 'English',
   words: {
     /** Twelve months; each may be called by any of its names, which a line parts. */
     months:
@@ -167,6 +166,8 @@ export const texts = {
   },
   /** Titles of columns: those of our own CSV, and one that no file of ours has. */
   column: { ...files.calendarCsv.column, when: 'sign or day' },
+  /** What a table of ours says about itself. */
+  file: { state: files.ics.state, byRole: files.sheet.byRole, caution: files.caution },
   /** Other titles that a column may stand under, which a line parts. */
   alias: {
     number: 'number | no | nr | id | line',

@@ -3,7 +3,6 @@
  * NOT YET READ by somebody who speaks the language from home: whoever does, please mend what sounds wrong.
  */
 export const texts = {
-  language: 'Español',
   words: {
     months:
       'enero, ene | febrero, feb | marzo, mar | abril, abr | mayo, may | junio, jun | julio, jul | agosto, ago | septiembre, setiembre, sept, sep, set | octubre, oct | noviembre, nov | diciembre, dic',
@@ -216,6 +215,43 @@ export const texts = {
     caution: 'cuidado',
     notes: 'notas',
     giver: 'quién lo dio',
+    signExpected: 'señal: esperada',
+    signEarly: 'señal: lo más temprano',
+    signLate: 'señal: lo más tarde',
+    leadType: 'se guía por',
+    leadMarker: 'estrella o figura',
+    leadPhenomenon: 'qué día de la estrella',
+    leadOccurrence: 'qué vez en el año',
+    leadDate: 'día fijo',
+    leadOther: 'otra señal',
+    leadEntry: 'se guía por la entrada con el número',
+    leadDay: 'cuál de sus días',
+    variantOf: 'otro tiempo de la entrada con el número',
+    variantDifference: 'otro tiempo: en qué difiere',
+    variantConfidence: 'otro tiempo: qué tan seguro',
+    variantBasis: 'otro tiempo: en qué se apoya',
+    boardShows: 'el tablero muestra',
+    boardVariant: 'el tablero muestra el tiempo con el número',
+    boardReason: 'tablero: por qué',
+    level: 'quién puede verlo',
+    year: 'año',
+    place: 'lugar',
+    issue: 'edición',
+    care: 'precaución',
+  },
+  file: {
+    state: {
+      draft: 'borrador',
+      'in-review': 'en revisión',
+      'changes-asked': 'se pidieron cambios',
+      'signed-off': 'firmado, sin publicar',
+      published: 'publicado',
+      replaced: 'reemplazado',
+      recalled: 'retirado',
+    },
+    byRole: 'una persona mayor del pueblo',
+    caution:
+      'Las estrellas señalan la temporada, no pronostican el tiempo: siga al servicio meteorológico y a la oficina agrícola antes de confiar la semilla. La calima, las nubes, la Luna, los cerros y la vista pueden mover una observación varios días. Nunca mire al Sol.',
   },
   alias: {
     number: 'número | n.º | núm',

@@ -3,7 +3,6 @@
  * NOT YET READ by somebody who speaks the language from home: whoever does, please mend what sounds wrong.
  */
 export const texts = {
-  language: 'Français',
   words: {
     months:
       'janvier, janv, jan | février, févr, fév | mars, mar | avril, avr | mai | juin | juillet, juil | août | septembre, sept, sep | octobre, oct | novembre, nov | décembre, déc',
@@ -213,6 +212,43 @@ export const texts = {
     caution: 'prudence',
     notes: 'remarques',
     giver: 'qui l’a donné',
+    signExpected: 'signe : attendu',
+    signEarly: 'signe : au plus tôt',
+    signLate: 'signe : au plus tard',
+    leadType: 'se règle sur',
+    leadMarker: 'étoile ou figure',
+    leadPhenomenon: 'quel jour de l’étoile',
+    leadOccurrence: 'quelle fois dans l’année',
+    leadDate: 'jour fixe',
+    leadOther: 'un autre signe',
+    leadEntry: 'se règle sur la ligne numéro',
+    leadDay: 'lequel de ses jours',
+    variantOf: 'autre moment de la ligne numéro',
+    variantDifference: 'autre moment : en quoi il diffère',
+    variantConfidence: 'autre moment : à quel point c’est sûr',
+    variantBasis: 'autre moment : sur quoi il repose',
+    boardShows: 'le tableau mural montre',
+    boardVariant: 'le tableau mural montre le moment numéro',
+    boardReason: 'tableau mural : pourquoi',
+    level: 'qui peut le voir',
+    year: 'année',
+    place: 'lieu',
+    issue: 'édition',
+    care: 'précaution',
+  },
+  file: {
+    state: {
+      draft: 'brouillon',
+      'in-review': 'en relecture',
+      'changes-asked': 'changements demandés',
+      'signed-off': 'signé, non publié',
+      published: 'publié',
+      replaced: 'remplacé',
+      recalled: 'retiré',
+    },
+    byRole: 'une personne âgée du village',
+    caution:
+      'Les étoiles marquent la saison, elles ne prédisent pas le temps : suivez le service météorologique et le bureau agricole avant d’engager la semence. La brume, les nuages, la Lune, les collines et les yeux peuvent déplacer une observation de plusieurs jours. Ne regardez jamais le Soleil.',
   },
   alias: {
     number: 'numéro | n°',

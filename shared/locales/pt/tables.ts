@@ -3,7 +3,6 @@
  * NOT YET READ by somebody who speaks the language from home: whoever does, please mend what sounds wrong.
  */
 export const texts = {
-  language: 'Português',
   words: {
     months:
       'janeiro, jan | fevereiro, fev | março, mar | abril, abr | maio, mai | junho, jun | julho, jul | agosto, ago | setembro, set | outubro, out | novembro, nov | dezembro, dez',
@@ -214,6 +213,43 @@ export const texts = {
     caution: 'cuidado',
     notes: 'notas',
     giver: 'quem o deu',
+    signExpected: 'sinal: esperado',
+    signEarly: 'sinal: o mais cedo',
+    signLate: 'sinal: o mais tarde',
+    leadType: 'guia-se por',
+    leadMarker: 'estrela ou figura',
+    leadPhenomenon: 'qual dia da estrela',
+    leadOccurrence: 'qual vez no ano',
+    leadDate: 'dia fixo',
+    leadOther: 'outro sinal',
+    leadEntry: 'guia-se pela entrada com o número',
+    leadDay: 'qual dos seus dias',
+    variantOf: 'outro tempo da entrada com o número',
+    variantDifference: 'outro tempo: em que difere',
+    variantConfidence: 'outro tempo: quão certo',
+    variantBasis: 'outro tempo: em que se apoia',
+    boardShows: 'o quadro mostra',
+    boardVariant: 'o quadro mostra o tempo com o número',
+    boardReason: 'quadro: porquê',
+    level: 'quem pode ver',
+    year: 'ano',
+    place: 'lugar',
+    issue: 'edição',
+    care: 'precaução',
+  },
+  file: {
+    state: {
+      draft: 'rascunho',
+      'in-review': 'em revisão',
+      'changes-asked': 'mudanças pedidas',
+      'signed-off': 'assinado, não publicado',
+      published: 'publicado',
+      replaced: 'substituído',
+      recalled: 'retirado',
+    },
+    byRole: 'uma pessoa mais velha da aldeia',
+    caution:
+      'As estrelas marcam a estação, não preveem o tempo: siga o serviço meteorológico e o escritório agrícola antes de confiar a semente. A névoa, as nuvens, a Lua, os montes e os olhos podem mudar uma observação em vários dias. Nunca olhe para o Sol.',
   },
   alias: {
     number: 'número | n.º',

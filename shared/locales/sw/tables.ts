@@ -3,7 +3,6 @@
  * NOT YET READ by somebody who speaks the language from home: whoever does, please mend what sounds wrong.
  */
 export const texts = {
-  language: 'Kiswahili',
   words: {
     months:
       'Januari, Jan | Februari, Feb | Machi, Mac | Aprili, Apr | Mei | Juni, Jun | Julai, Jul | Agosti, Ago | Septemba, Sep | Oktoba, Okt | Novemba, Nov | Desemba, Des',
@@ -202,6 +201,43 @@ export const texts = {
     caution: 'tahadhari',
     notes: 'maelezo',
     giver: 'nani aliitoa',
+    signExpected: 'ishara: inatarajiwa',
+    signEarly: 'ishara: mapema zaidi',
+    signLate: 'ishara: mwisho kabisa',
+    leadType: 'hufuata',
+    leadMarker: 'nyota au kundi la nyota',
+    leadPhenomenon: 'siku ipi ya nyota',
+    leadOccurrence: 'mara ya ngapi katika mwaka',
+    leadDate: 'siku maalum',
+    leadOther: 'ishara nyingine ya anga',
+    leadEntry: 'hufuata kazi yenye namba',
+    leadDay: 'ipi kati ya siku zake',
+    variantOf: 'wakati mwingine wa kazi yenye namba',
+    variantDifference: 'wakati mwingine: tofauti yake',
+    variantConfidence: 'wakati mwingine: uhakika',
+    variantBasis: 'wakati mwingine: msingi wake',
+    boardShows: 'ubao unaonyesha',
+    boardVariant: 'ubao unaonyesha wakati wenye namba',
+    boardReason: 'ubao: kwa nini',
+    level: 'nani anaweza kuona',
+    year: 'mwaka',
+    place: 'mahali',
+    issue: 'toleo',
+    care: 'angalizo',
+  },
+  file: {
+    state: {
+      draft: 'rasimu',
+      'in-review': 'inapitiwa',
+      'changes-asked': 'mabadiliko yameombwa',
+      'signed-off': 'imesainiwa, haijachapishwa',
+      published: 'imechapishwa',
+      replaced: 'imebadilishwa na nyingine',
+      recalled: 'imeondolewa',
+    },
+    byRole: 'mzee wa kijiji',
+    caution:
+      'Nyota huonyesha msimu, hazitabiri hali ya hewa: fuata huduma ya hali ya hewa na ofisi ya kilimo kabla ya kupanda mbegu. Ukungu, mawingu, Mwezi, vilima na macho vinaweza kusogeza siku ya kuona kwa siku kadhaa. Usitazame Jua kamwe.',
   },
   alias: {
     number: 'namba | nambari',

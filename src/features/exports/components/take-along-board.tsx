@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { exportsEndpoints } from '#shared/contracts/exports.js';
 import { apiUrl } from '#src/lib/api-client.js';
 import { paths } from '#src/lib/paths.js';
+import { TableLanguageField, useTableLanguage } from '#src/lib/table-language.js';
 import { ButtonAnchor, ButtonLink } from '#src/ui/button.js';
 import { SelectField } from '#src/ui/field.js';
 import { Board } from '#src/ui/surfaces.js';
@@ -24,6 +25,7 @@ interface TakeAlongBoardProps {
 export function TakeAlongBoard({ calendarId, number, isPublished }: TakeAlongBoardProps) {
   const { t } = useTranslation('exports');
   const [reminder, setReminder] = useState<Reminder>('none');
+  const tableLanguage = useTableLanguage();
   const params = { calendarId, number: String(number) };
   const icsQuery = reminder === 'none' ? {} : { alarmDays: Number(reminder) };
   return (
@@ -56,13 +58,20 @@ export function TakeAlongBoard({ calendarId, number, isPublished }: TakeAlongBoa
             {t('along.ics')}
           </ButtonAnchor>
         </div>
-        <ButtonAnchor
-          href={apiUrl(exportsEndpoints.csv, { params, query: {} })}
-          download
-          icon={<Table aria-hidden size={20} />}
-        >
-          {t('along.csv')}
-        </ButtonAnchor>
+        <div className="grid gap-2">
+          <TableLanguageField
+            label={t('along.csvLanguage')}
+            unreadHint={t('along.csvUnread')}
+            {...tableLanguage}
+          />
+          <ButtonAnchor
+            href={apiUrl(exportsEndpoints.csv, { params, query: { language: tableLanguage.value } })}
+            download
+            icon={<Table aria-hidden size={20} />}
+          >
+            {t('along.csv')}
+          </ButtonAnchor>
+        </div>
         <TakeWhole params={params} />
       </div>
     </Board>

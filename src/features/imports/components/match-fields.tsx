@@ -1,9 +1,10 @@
 import { useTranslation } from 'react-i18next';
 import { IMPORT_COLUMNS, type ImportColumn, type TableInput } from '#shared/contracts/imports.js';
+import { ownTableLanguage } from '#src/lib/table-language.js';
 import { SelectField } from '#src/ui/field.js';
 import type { Matching } from '../model/match-columns.js';
 import type { SavedTable } from '../model/read-table.js';
-import { ownTableLanguage, wordsOfTables } from '../model/table-languages.js';
+import { wordsOfTables } from '../model/table-languages.js';
 
 const ORDERS = ['day-first', 'month-first'] as const;
 

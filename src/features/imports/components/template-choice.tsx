@@ -1,46 +1,29 @@
 import { Download } from 'lucide-react';
-import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import { TABLE_LANGUAGES, tableTexts } from '#shared/locales/tables.js';
-import { keep, readKept } from '#src/lib/device-storage.js';
+import { tableTexts } from '#shared/locales/tables.js';
+import { TableLanguageField, useTableLanguage } from '#src/lib/table-language.js';
 import { Button } from '#src/ui/button.js';
-import { SelectField } from '#src/ui/field.js';
-import { isUnread, ownTableLanguage, wordsOfTables } from '../model/table-languages.js';
+import { wordsOfTables } from '../model/table-languages.js';
 import { templateCsv } from '../model/template.js';
-
-const KEPT_AT = 'import-template-language';
 
 /** An empty table in a language of the officer's choice, which this device keeps. */
 export function TemplateChoice() {
-  const { t, i18n } = useTranslation('imports');
-  const [language, setLanguage] = useState(() =>
-    ownTableLanguage(readKept(KEPT_AT) ?? i18n.resolvedLanguage),
-  );
+  const { t } = useTranslation('imports');
+  const language = useTableLanguage();
   return (
     <div className="mt-3 grid gap-3">
-      <SelectField
+      <TableLanguageField
         label={t('bring.templateLanguage')}
-        hint={isUnread(language) ? t('bring.templateUnread') : undefined}
-        value={language}
-        onChange={(event) => {
-          const next = ownTableLanguage(event.currentTarget.value);
-          setLanguage(next);
-          keep(KEPT_AT, next);
-        }}
-      >
-        {TABLE_LANGUAGES.map((each) => (
-          <option key={each} value={each} lang={each}>
-            {tableTexts[each].language}
-          </option>
-        ))}
-      </SelectField>
+        unreadHint={t('bring.templateUnread')}
+        {...language}
+      />
       <p>
         <Button
           look="quiet"
           icon={<Download aria-hidden size={20} />}
           onClick={() => {
-            const { template } = tableTexts[language];
-            const { titleOf } = wordsOfTables(language);
+            const { template } = tableTexts[language.value];
+            const { titleOf } = wordsOfTables(language.value);
             download(template.fileName, templateCsv(titleOf, Object.values(template.lines)));
           }}
         >

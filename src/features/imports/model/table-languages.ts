@@ -1,9 +1,5 @@
-import {
-  READ_TABLE_LANGUAGES,
-  TABLE_LANGUAGES,
-  tableTexts,
-  type TableLanguage,
-} from '#shared/locales/tables.js';
+import { TABLE_LANGUAGES, type TableLanguage } from '#shared/locales/table-languages.js';
+import { tableTexts } from '#shared/locales/tables.js';
 import { columnWordsOf, languageOfTitles, type ImportColumnWords } from './column-words.js';
 
 /** Words for tables of one language; titles of every other one are known, too. */
@@ -16,14 +12,4 @@ export function wordsOfTables(language: TableLanguage): ImportColumnWords {
 export function tableLanguageOf(titles: readonly string[], own: string): TableLanguage {
   const ownFirst = [...TABLE_LANGUAGES].sort((a, b) => Number(b === own) - Number(a === own));
   return languageOfTitles(titles, ownFirst, tableTexts) ?? TABLE_LANGUAGES[0];
-}
-
-/** The person's own language where there are tables in it, else the first. */
-export function ownTableLanguage(own: unknown): TableLanguage {
-  return TABLE_LANGUAGES.find((language) => language === own) ?? TABLE_LANGUAGES[0];
-}
-
-/** Whether nobody who speaks the language has read its words yet. */
-export function isUnread(language: TableLanguage): boolean {
-  return !READ_TABLE_LANGUAGES.includes(language);
 }

@@ -2,9 +2,11 @@ import { describe, expect, it } from 'vitest';
 import { markerKeysByName, TABLE_WORDS } from '#server/features/imports/import-words.js';
 import type { TableFacts } from '#server/features/imports/table-cells.js';
 import { tablePlan } from '#server/features/imports/table-plan.js';
+import { CALENDAR_CSV_COLUMNS } from '#shared/calendar/csv-columns.js';
 import { dateCell, plainWords } from '#shared/calendar/import-dates.js';
 import { IMPORT_COLUMNS } from '#shared/contracts/imports.js';
-import { TABLE_LANGUAGES, tableTexts, type TableLanguage } from '#shared/locales/tables.js';
+import { TABLE_LANGUAGES, type TableLanguage } from '#shared/locales/table-languages.js';
+import { tableTexts } from '#shared/locales/tables.js';
 import { plainTitle } from '#src/features/imports/model/column-words.js';
 import { guessColumns, matchedLines } from '#src/features/imports/model/match-columns.js';
 import { readTable } from '#src/features/imports/model/read-table.js';
@@ -43,6 +45,19 @@ describe.each(TABLE_LANGUAGES)('a table in %s', (language) => {
     for (const [each, others] of Object.entries(alias)) {
       for (const title of others.split('|')) expect(guessColumns([title], known)).toEqual([each]);
     }
+  });
+
+  it('has a title for every column of the product’s own table, by which each is known again', () => {
+    const { column } = tableTexts[language];
+    const titles = CALENDAR_CSV_COLUMNS.map(({ id }) => column[id]);
+    expect(new Set(titles.map(plainTitle)).size).toBe(titles.length);
+    const { titles: known } = wordsOfTables(tableLanguageOf(titles, 'en'));
+    const given = IMPORT_COLUMNS.filter((each) => CALENDAR_CSV_COLUMNS.some(({ id }) => id === each));
+    const matched = guessColumns(titles, known);
+    expect(CALENDAR_CSV_COLUMNS.flatMap(({ id }, index) => (matched[index] === id ? [id] : []))).toEqual(
+      CALENDAR_CSV_COLUMNS.map(({ id }) => id).filter((id) => given.some((each) => each === id)),
+    );
+    expect(matched.filter((each) => each !== null)).toHaveLength(given.length);
   });
 
   it('comes in as its own examples say, which are the same work in every language', () => {
