@@ -214,12 +214,12 @@ describe('CSV', () => {
   it('is titled in the language that is asked for; what stands in the lines is the same', async () => {
     const csv = (language: string) =>
       textOf(village.officer, 'draft', `calendar.csv?mark=no&language=${language}`);
-    const [, ...english] = Papa.parse<string[]>(await csv('en')).data;
+    const [, ...english] = Papa.parse<string[]>(await csv('en'), { delimiter: ',' }).data;
     const about = CALENDAR_CSV_COLUMNS.flatMap(({ part }, index) => (part === 'about' ? [index] : []));
     const plain = (lines: string[][]) => lines.map((line) => line.filter((_, at) => !about.includes(at)));
     for (const language of TABLE_LANGUAGES) {
       const { column, file } = tableTexts[language];
-      const [titles, ...lines] = Papa.parse<string[]>(await csv(language)).data;
+      const [titles, ...lines] = Papa.parse<string[]>(await csv(language), { delimiter: ',' }).data;
       expect(titles).toEqual(CALENDAR_CSV_COLUMNS.map(({ id }) => column[id]));
       expect(plain(lines)).toEqual(plain(english));
       expect(lines[0]).toEqual(expect.arrayContaining([file.state.draft, file.caution]));
