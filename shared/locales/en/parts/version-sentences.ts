@@ -41,6 +41,17 @@ export const sentence = {
   otherDaysStay: 'The other days stay.',
   windowGone: 'It has no days any more; before, it was {{before}}.',
   windowCame: 'It has days now: <1>{{after}}</1>.',
+  planMoves: {
+    later_one:
+      'While it waits for the work before it, its plan moves <1>{{count}} day later</1>: best from {{after}} instead of {{before}}.',
+    later_other:
+      'While it waits for the work before it, its plan moves <1>{{count}} days later</1>: best from {{after}} instead of {{before}}.',
+    earlier_one:
+      'While it waits for the work before it, its plan moves <1>{{count}} day earlier</1>: best from {{after}} instead of {{before}}.',
+    earlier_other:
+      'While it waits for the work before it, its plan moves <1>{{count}} days earlier</1>: best from {{after}} instead of {{before}}.',
+  },
+  otherCounting: 'Counted the other way it would be best from {{after}}; before, from {{before}}.',
   noDateMoves: 'No day moves.',
   lead: 'It goes by <1>{{after}}</1> now; before, by {{before}}.',
   markerMoved: {

@@ -57,9 +57,11 @@ export function useSaveEntry(editor: Editor): SaveEntry {
   const client = useQueryClient();
   const takeEntry = useTakeEntry(calendar.id);
   const deliver = useDeliver(calendar.id, edits);
-  useSendAgain(editor, deliver);
   const [refused, setRefused] = useState<Refused | null>(null);
   const [choosingId, setChoosingId] = useState<string | null>(null);
+  useSendAgain(editor, deliver, (entryId) => {
+    setRefused((before) => (before?.entryId === entryId ? null : before));
+  });
 
   const refuse = (entryId: string, content: EntryInput, server: FieldProblems, overall: string | null) => {
     setRefused((before) => ({ entryId, content, server, overall, attempt: (before?.attempt ?? 0) + 1 }));

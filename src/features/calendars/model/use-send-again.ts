@@ -7,7 +7,11 @@ import type { Editor } from './use-editor.js';
 const EVERY_MS = 10_000;
 
 /** What was on its way when the network went, or the page was closed, is sent again by itself, and counts once. */
-export function useSendAgain({ edits, selection, canWrite }: Editor, { sendAgain }: Deliver): void {
+export function useSendAgain(
+  { edits, selection, canWrite }: Editor,
+  { sendAgain }: Deliver,
+  onSaved: (entryId: string) => void,
+): void {
   const { t } = useTranslation('calendars');
   const say = useToast();
   const isBusy = useRef(false);
@@ -18,6 +22,7 @@ export function useSendAgain({ edits, selection, canWrite }: Editor, { sendAgain
       if (!sending) continue;
       try {
         const saved = await sendAgain(entryId, sending);
+        onSaved(entryId);
         if (selection.openId === entryId && saved.id !== entryId) selection.rename(saved.id);
         say(t('editor.saved', { title: saved.content.titleOfficer }));
       } catch {

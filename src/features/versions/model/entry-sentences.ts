@@ -1,6 +1,6 @@
 import type { ParseKeys } from 'i18next';
 import { isStarLead } from '#shared/calendar/entry-model.js';
-import type { EntryInput, EntryLead, FixedLastDate } from '#shared/contracts/calendars.js';
+import type { EntryDates, EntryInput, EntryLead, FixedLastDate } from '#shared/contracts/calendars.js';
 import type { OccurrenceDays } from '#shared/contracts/stars.js';
 import type { EntryComparison, VersionEntryBody } from '#shared/contracts/versions.js';
 import type { ChangeTopic } from './change-topics.js';
@@ -91,6 +91,7 @@ function changeSentences(before: VersionEntryBody, after: VersionEntryBody, word
   const days = [
     ...windowSentences(before, after, words),
     ...leadSentences(before, after, words),
+    ...countedSentences(before.dates, after.dates, words),
     ...lastDateSentences(before.content, after.content, words),
   ];
   const other = wordSentences(before.content, after.content, words);
@@ -128,6 +129,18 @@ function windowSentences(before: VersionEntryBody, after: VersionEntryBody, word
   }));
   const rest: Sentence = { key: 'sentence.otherDaysStay', values: {}, goesOn: true };
   return moving.length < POINTS.length ? [...each, rest] : each;
+}
+
+/** The other counting of what is counted from something else, such as its plan while it waits for the day of other work. */
+function countedSentences(before: EntryDates, after: EntryDates, words: CompareWords): Sentence[] {
+  const was = before.counted?.beside?.bestFrom;
+  const is = after.counted?.beside?.bestFrom;
+  if (was === undefined || is === undefined || was === is) return [];
+  const values = { before: words.day(was), after: words.day(is) };
+  const days = daysBetween(was, is);
+  return before.counted?.basis === 'waiting' && after.counted?.basis === 'waiting'
+    ? [{ key: `sentence.planMoves.${direction(days)}`, values: { ...values, count: Math.abs(days) } }]
+    : [{ key: 'sentence.otherCounting', values }];
 }
 
 /** Another lead; or the same, whose day the sky (or the place) moved. */

@@ -67,6 +67,29 @@ describe('what changed in an entry', () => {
     expect(say(body(), body())).toEqual([]);
   });
 
+  it('says how the plan moves of what waits for other work, and never only that something did', () => {
+    const waiting = (bestFrom: string, basis: 'waiting' | 'seen' = 'waiting') => ({
+      ...body({}, { window: null }),
+      dates: {
+        ...dates({ window: null }),
+        counted: {
+          ...{ basis, from: null, to: null },
+          beside: {
+            ...{ earliest: '2027-06-30', bestFrom, bestTo: '2027-07-10', lastAdvised: '2027-07-20' },
+            lastAdvisedBy: 'offset' as const,
+          },
+        },
+      },
+    });
+    expect(say(waiting('2027-07-03'), waiting('2027-07-06'))).toEqual([
+      ['sentence.planMoves.later', { count: 3, before: '07-03', after: '07-06' }],
+    ]);
+    expect(say(waiting('2027-07-03'), waiting('2027-07-03'))).toEqual([]);
+    expect(say(waiting('2027-07-03', 'seen'), waiting('2027-07-02', 'seen'))).toEqual([
+      ['sentence.otherCounting', { before: '07-03', after: '07-02' }],
+    ]);
+  });
+
   it('names the day that moves, by how much and from where to where, and that the others stay', () => {
     const later = body({}, { window: ['2027-06-10', '2027-06-17', '2027-06-30', '2027-07-05'] });
     expect(say(body(), later)).toEqual([
