@@ -4,6 +4,7 @@ import type { Place } from '#shared/contracts/places.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import { computeMarkerYear, watchTimes } from '#shared/sky/index.js';
 import { openTestApi, TEST_NOW, type Client, type TestApi } from '#tests/support/api.js';
+import { asBuffer } from '#tests/support/bytes-of.js';
 import { readPdfPages } from '#tests/support/pdf/pdf-content.js';
 import { readPdfText } from '#tests/support/pdf/read-text.js';
 import { addPlaceLike, firstPlace } from '#tests/support/place-api.js';
@@ -204,12 +205,3 @@ describe('the printed card', () => {
     expect((await card({ date: '2027-06-10' })).equals(await card({ date: '2027-06-10' }))).toBe(true);
   });
 });
-
-function asBuffer(response: unknown, done: (error: Error | null, body: Buffer) => void): void {
-  const stream = response as NodeJS.ReadableStream;
-  const chunks: Buffer[] = [];
-  stream.on('data', (chunk: Buffer) => chunks.push(chunk));
-  stream.on('end', () => {
-    done(null, Buffer.concat(chunks));
-  });
-}

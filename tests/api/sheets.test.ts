@@ -4,6 +4,7 @@ import type { SheetPreview } from '#shared/contracts/sheets.js';
 import type { Version } from '#shared/contracts/versions.js';
 import type { SheetPage } from '#shared/sheet/primitives.js';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import { asBuffer } from '#tests/support/bytes-of.js';
 import {
   addEntry,
   beginCalendar,
@@ -265,13 +266,3 @@ describe('a recalled version', () => {
     for (const page of pagesOf(shown)) expect(allWords([page])).toContain('Recalled');
   });
 });
-
-/** supertest reads files as text otherwise. Its type of the answer leaves the stream out. */
-function asBuffer(response: unknown, done: (error: Error | null, body: Buffer) => void): void {
-  const stream = response as NodeJS.ReadableStream;
-  const chunks: Buffer[] = [];
-  stream.on('data', (chunk: Buffer) => chunks.push(chunk));
-  stream.on('end', () => {
-    done(null, Buffer.concat(chunks));
-  });
-}

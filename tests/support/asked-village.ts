@@ -2,6 +2,7 @@ import type { EntryInput } from '#shared/contracts/calendars.js';
 import type { ConsentContent, ConsentLine } from '#shared/contracts/consents.js';
 import type { Problem } from '#shared/contracts/problem.js';
 import type { Client, TestApi } from './api.js';
+import { asBuffer } from './bytes-of.js';
 import { addEntry, beginCalendar, openVillage, publishDraft, type Village } from './calendar-api.js';
 import { consentsPath } from './consent-api.js';
 import { readPdfText } from './pdf/read-text.js';
@@ -60,13 +61,4 @@ export function withdrawConsent(client: Client, { id, version }: ConsentLine) {
 /** Field and code of everything that was refused. */
 export function refusedFields({ body }: { body: unknown }): [string, string][] | undefined {
   return (body as Problem).errors?.map(({ field, code }) => [field, code]);
-}
-
-function asBuffer(response: unknown, done: (failure: Error | null, body: Buffer) => void): void {
-  const stream = response as NodeJS.ReadableStream;
-  const parts: Buffer[] = [];
-  stream.on('data', (part: Buffer) => parts.push(part));
-  stream.on('end', () => {
-    done(null, Buffer.concat(parts));
-  });
 }

@@ -239,7 +239,7 @@ export const texts = {
   file: {
     state: {
       draft: 'brouillon',
-      'in-review': 'en relecture',
+      'in-review': 'soumis aux anciens',
       'changes-asked': 'changements demandés',
       'signed-off': 'signé, non publié',
       published: 'publié',

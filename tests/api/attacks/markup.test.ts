@@ -3,6 +3,7 @@ import { ENDPOINTS } from '#shared/contracts/index.js';
 import { fillPath, type Endpoint } from '#shared/contracts/endpoint.js';
 import type { Response } from 'supertest';
 import { openTestApi, type Client, type TestApi } from '#tests/support/api.js';
+import { asBuffer } from '#tests/support/bytes-of.js';
 import { addPicture, attachmentInput, attachmentsPath } from '#tests/support/attachment-api.js';
 import { addEntry, beginCalendar, entriesOf, submit, versionPath } from '#tests/support/calendar-api.js';
 import { addFigure } from '#tests/support/figure-api.js';
@@ -91,13 +92,7 @@ describe('script that is stored', () => {
     const answer = await officer
       .get(`${versionPath(version)}/sheet.pdf?layout=month-cards`)
       .buffer(true)
-      .parse((response, done) => {
-        const parts: Buffer[] = [];
-        response.on('data', (part: Buffer) => parts.push(part));
-        response.on('end', () => {
-          done(null, Buffer.concat(parts));
-        });
-      })
+      .parse(asBuffer)
       .expect(200);
     const file = answer.body as Buffer;
     expect(file.toString('latin1')).not.toMatch(/\/(JavaScript|JS|URI|Launch|OpenAction|EmbeddedFile|AA)\b/u);

@@ -37,9 +37,11 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
   const byKey = markers.data?.byKey ?? null;
   const signLanes = useSignLanes(shown, byKey ?? NO_NAMES);
   const nameOf = (entry: ShownEntry) => entry.content.titleOfficer || t('editor.untitled');
-  const undated = undatedOf(shown);
-  const unled = unledOf(shown);
-  const beside = besideOf(shown, strip.whole);
+  const without = [
+    ['strip.unled', unledOf(shown)],
+    ['strip.undated', undatedOf(shown)],
+    ['strip:beside', besideOf(shown, strip.whole)],
+  ] as const;
   const inTable = (entryId: string, change: DraftChange) => {
     const entry = shown.find(({ id }) => id === entryId);
     if (entry) changeEntry(editor, entry, change);
@@ -95,30 +97,17 @@ export function EditorStrip({ editor, saving }: { editor: Editor; saving: SaveEn
         moves={canWrite ? moves : undefined}
       />
       {markers.isError && <p className="text-small">{t('editor.stripTrouble')}</p>}
-      {unled.length > 0 && (
-        <p className="text-small text-umber-soft">
-          {t('strip.unled', {
-            count: unled.length,
-            titles: listWords(unled.map(nameOf), i18n.language),
-          })}
-        </p>
-      )}
-      {undated.length > 0 && shown.length > 0 && (
-        <p className="text-small text-umber-soft">
-          {t('strip.undated', {
-            year,
-            count: undated.length,
-            titles: listWords(undated.map(nameOf), i18n.language),
-          })}
-        </p>
-      )}
-      {beside.length > 0 && (
-        <p className="text-small text-umber-soft">
-          {t('strip:beside', {
-            count: beside.length,
-            titles: listWords(beside.map(nameOf), i18n.language),
-          })}
-        </p>
+      {without.map(
+        ([key, entries]) =>
+          entries.length > 0 && (
+            <p key={key} className="text-small text-umber-soft">
+              {t(key, {
+                year,
+                count: entries.length,
+                titles: listWords(entries.map(nameOf), i18n.language),
+              })}
+            </p>
+          ),
       )}
       <div className="flex flex-wrap gap-x-6">
         <More label={t('strip.howToRead')}>
